@@ -5,7 +5,7 @@ public final class Bedmark {
     private Bedmark() {
     }
 
-    public static void main(String[] arguments) {
+    public static void main(String... arguments) {
         throw new UnsupportedOperationException("not wired yet");
     }
 }

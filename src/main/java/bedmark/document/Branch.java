@@ -8,6 +8,7 @@ import java.math.BigDecimal;
 import java.time.DateTimeException;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -25,7 +26,7 @@ public record Branch(Map<String, Node> members) implements Node {
     public static final Branch EMPTY = new Branch(Map.of());
 
     public Branch {
-        members = java.util.Collections.unmodifiableMap(new LinkedHashMap<>(members));
+        members = Collections.unmodifiableMap(new LinkedHashMap<>(members));
     }
 
     public Optional<Node> get(String key) {

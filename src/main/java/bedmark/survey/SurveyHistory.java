@@ -1,0 +1,167 @@
+package bedmark.survey;
+
+import bedmark.document.Branch;
+import bedmark.document.Node;
+import bedmark.document.Pointer;
+import java.time.OffsetDateTime;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * A survey as the fold of its journal entries: what it holds now, how far it is on its way, and every change.
+ *
+ * @param survey  the survey as it stands
+ * @param state   how far it is on its way
+ * @param changes every answer that was set, oldest first, undone ones among them
+ */
+public record SurveyHistory(Survey survey, QueueState state, List<Change> changes) {
+
+    /**
+     * One answer as it was set.
+     *
+     * @param before what stood there
+     * @param after  what stands there since; nothing where it was cleared
+     * @param undone whether the change was taken back
+     */
+    public record Change(long sequence, OffsetDateTime at, String person, Pointer where, Optional<Node> before,
+                         Optional<Node> after, boolean undone) {
+        private Change takenBack() {
+            return new Change(sequence, at, person, where, before, after, true);
+        }
+    }
+
+    public SurveyHistory {
+        changes = List.copyOf(changes);
+    }
+
+    /**
+     * Folds the entries of one survey.
+     *
+     * @return nothing where no entry opens the survey
+     */
+    public static Optional<SurveyHistory> fold(Iterable<Entry> entries) {
+        Optional<SurveyHistory> history = Optional.empty();
+        for (Entry entry : entries) {
+            history = after(history, entry);
+        }
+        return history;
+    }
+
+    /**
+     * The history after one more entry of the same survey.
+     *
+     * @throws IllegalStateException where the act is impossible in the survey's state
+     */
+    public static Optional<SurveyHistory> after(Optional<SurveyHistory> history, Entry entry) {
+        Act act = entry.act();
+        if (act instanceof Act.SurveyOpened opened) {
+            return Optional.of(new SurveyHistory(new Survey(opened.document()), QueueState.OPEN, List.of()));
+        }
+        if (act instanceof Act.RevisionOpened opened) {
+            return Optional.of(new SurveyHistory(new Survey(opened.document()), QueueState.OPEN, List.of()));
+        }
+        if (act instanceof Act.SurveyTaken taken) {
+            return Optional.of(new SurveyHistory(new Survey(taken.document()), QueueState.RECEIVED, List.of()));
+        }
+        return history.map(known -> known.next(entry));
+    }
+
+    /** The newest change that still counts: what an undo would take back. */
+    public Optional<Change> newest() {
+        for (int i = changes.size() - 1; i >= 0; i--) {
+            if (!changes.get(i).undone()) {
+                return Optional.of(changes.get(i));
+            }
+        }
+        return Optional.empty();
+    }
+
+    /** The changes of one place, and of what lies below it, oldest first. */
+    public List<Change> of(Pointer where) {
+        return changes.stream().filter(change -> where.holds(change.where())).toList();
+    }
+
+    private SurveyHistory next(Entry entry) {
+        Act act = entry.act();
+        if (act instanceof Act.AnswerSet set) {
+            return answered(entry, set);
+        }
+        if (act instanceof Act.AnswerUndone undone) {
+            return undone(undone.undone());
+        }
+        if (act instanceof Act.PhotoAttached attached) {
+            requireOpen();
+            List<Node> photos = new ArrayList<>(survey.document().series("photos"));
+            photos.add(attached.photo());
+            return with(survey.document().with("photos", new Node.Series(photos)));
+        }
+        if (act instanceof Act.SurveyCompleted completed) {
+            Branch signed = survey.document().with("completedAt", entry.at().toString())
+                    .with("signedOffBy", completed.signedOffBy());
+            return new SurveyHistory(new Survey(signed), state.moveTo(QueueState.COMPLETED), changes);
+        }
+        if (act instanceof Act.SurveysQueued) {
+            return moved(QueueState.QUEUED);
+        }
+        if (act instanceof Act.PackExported) {
+            return moved(QueueState.EXPORTED);
+        }
+        if (act instanceof Act.ReceiptNoted) {
+            return moved(QueueState.RECEIVED);
+        }
+        return this;
+    }
+
+    private SurveyHistory answered(Entry entry, Act.AnswerSet set) {
+        requireOpen();
+        Branch document = survey.document();
+        Optional<Node> before = document.at(set.where());
+        List<Change> longer = new ArrayList<>(changes);
+        longer.add(new Change(entry.sequence(), entry.at(), entry.person(), set.where(), before, set.answer(), false));
+        return new SurveyHistory(new Survey(put(document, set.where(), set.answer())), state, longer);
+    }
+
+    /**
+     * Takes one change back. A later change of the same place stands; only the newest change of a place gives back
+     * what was there before it.
+     */
+    private SurveyHistory undone(long sequence) {
+        requireOpen();
+        List<Change> marked = new ArrayList<>(changes);
+        for (int i = 0; i < marked.size(); i++) {
+            Change change = marked.get(i);
+            if (change.sequence() == sequence && !change.undone()) {
+                marked.set(i, change.takenBack());
+                boolean covered = marked.subList(i + 1, marked.size()).stream()
+                        .anyMatch(later -> !later.undone() && overlaps(later.where(), change.where()));
+                Branch document = survey.document();
+                return new SurveyHistory(covered ? survey
+                        : new Survey(put(document, change.where(), change.before())), state, marked);
+            }
+        }
+        throw new IllegalStateException("entry " + sequence + " is no change that can be undone");
+    }
+
+    private static boolean overlaps(Pointer one, Pointer other) {
+        return one.holds(other) || other.holds(one);
+    }
+
+    private static Branch put(Branch document, Pointer where, Optional<Node> answer) {
+        return answer.map(node -> document.with(where, node)).orElseGet(() -> document.without(where));
+    }
+
+    private SurveyHistory with(Branch document) {
+        return new SurveyHistory(new Survey(document), state, changes);
+    }
+
+    private SurveyHistory moved(QueueState next) {
+        return new SurveyHistory(survey, state.moveTo(next), changes);
+    }
+
+    private void requireOpen() {
+        if (state != QueueState.OPEN) {
+            throw new IllegalStateException("survey " + survey.id() + " is completed; a correction is a new revision");
+        }
+    }
+}

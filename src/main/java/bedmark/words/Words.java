@@ -1,0 +1,62 @@
+package bedmark.words;
+
+import java.text.MessageFormat;
+import java.util.List;
+import java.util.Locale;
+import java.util.MissingResourceException;
+import java.util.ResourceBundle;
+
+/**
+ * The words of one language. A key is {@code bundle.key}: the part before the first dot names the resource bundle
+ * {@code bedmark/words/<bundle>.properties}. Numbers are put in already formatted, as texts.
+ */
+public final class Words {
+
+    /** The languages that are complete. */
+    public static final List<Locale> LANGUAGES = List.of(Locale.ENGLISH, Locale.forLanguageTag("es"));
+
+    private static final ResourceBundle.Control NO_FALLBACK =
+            ResourceBundle.Control.getNoFallbackControl(ResourceBundle.Control.FORMAT_PROPERTIES);
+
+    private final Locale locale;
+
+    /**
+     * @param locale language of the words and format of the numbers; a language without words gets the English ones
+     */
+    public Words(Locale locale) {
+        this.locale = locale;
+    }
+
+    public Locale locale() {
+        return locale;
+    }
+
+    /** The language alone, as in the language maps of a form. */
+    public String language() {
+        return locale.getLanguage();
+    }
+
+    /**
+     * The text of a key, with the arguments put in.
+     *
+     * @throws MissingResourceException where no bundle has the key; a test walks all keys that the code uses
+     */
+    public String text(String key, Object... arguments) {
+        int dot = key.indexOf('.');
+        if (dot < 0) {
+            throw new MissingResourceException("a key names its bundle: " + key, "Words", key);
+        }
+        String pattern = bundle(key.substring(0, dot)).getString(key.substring(dot + 1));
+        return new MessageFormat(pattern, locale).format(arguments);
+    }
+
+    /** Whether there is a text for the key. */
+    public boolean has(String key) {
+        int dot = key.indexOf('.');
+        return dot > 0 && bundle(key.substring(0, dot)).containsKey(key.substring(dot + 1));
+    }
+
+    private ResourceBundle bundle(String name) {
+        return ResourceBundle.getBundle("bedmark.words." + name, locale, NO_FALLBACK);
+    }
+}

@@ -1,0 +1,146 @@
+package bedmark.json;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Node;
+import bedmark.document.Pointer;
+import bedmark.document.Refused;
+import com.fasterxml.jackson.core.JsonFactory;
+import com.fasterxml.jackson.core.JsonLocation;
+import com.fasterxml.jackson.core.JsonParser;
+import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.core.JsonToken;
+import com.fasterxml.jackson.core.StreamReadConstraints;
+import com.fasterxml.jackson.core.StreamReadFeature;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.math.BigDecimal;
+import java.nio.ByteBuffer;
+import java.nio.charset.CharacterCodingException;
+import java.nio.charset.CodingErrorAction;
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+
+/**
+ * Reads JSON strictly: one object, valid UTF-8, no key twice, no number that a decimal of sensible size can't hold,
+ * nothing after the end. Every refusal names line and column.
+ */
+public final class JsonReader {
+    private static final int DEEPEST = 64;
+    private static final int LONGEST_NUMBER = 100;
+    private static final int LARGEST_EXPONENT = 100;
+    private static final JsonFactory FACTORY = JsonFactory.builder()
+            .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
+            .disable(StreamReadFeature.INCLUDE_SOURCE_IN_LOCATION)
+            .streamReadConstraints(StreamReadConstraints.builder()
+                    .maxNestingDepth(DEEPEST).maxNumberLength(LONGEST_NUMBER).maxStringLength(10_000_000).build())
+            .build();
+
+    private final JsonParser parser;
+    private final Map<Pointer, Document.Place> places = new HashMap<>();
+
+    private JsonReader(JsonParser parser) {
+        this.parser = parser;
+    }
+
+    /**
+     * Reads one object.
+     *
+     * @param bytes UTF-8, with or without a byte-order mark
+     * @throws Refused {@code json-unreadable} with line, column and what the parser met; {@code json-not-utf8}
+     */
+    public static Document read(byte[] bytes) {
+        String text = decode(bytes);
+        try (JsonParser parser = FACTORY.createParser(text)) {
+            return new JsonReader(parser).document();
+        } catch (JsonProcessingException e) {
+            throw new Refused(unreadable(e.getLocation(), e.getOriginalMessage()), e);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    private static String decode(byte[] bytes) {
+        try {
+            String text = StandardCharsets.UTF_8.newDecoder().onMalformedInput(CodingErrorAction.REPORT)
+                    .onUnmappableCharacter(CodingErrorAction.REPORT).decode(ByteBuffer.wrap(bytes)).toString();
+            return text.startsWith("\uFEFF") ? text.substring(1) : text;
+        } catch (CharacterCodingException e) {
+            throw new Refused(Defect.in("", "json-not-utf8"), e);
+        }
+    }
+
+    private Document document() throws IOException {
+        JsonToken first = parser.nextToken();
+        if (first != JsonToken.START_OBJECT) {
+            throw refused("an object is expected");
+        }
+        Branch root = (Branch) value(first, Pointer.ROOT);
+        if (parser.nextToken() != null) {
+            throw refused("something follows after the end of the object");
+        }
+        return new Document(root, places);
+    }
+
+    private Node value(JsonToken token, Pointer here) throws IOException {
+        JsonLocation location = parser.currentTokenLocation();
+        places.put(here, new Document.Place(location.getLineNr(), location.getColumnNr()));
+        return switch (token) {
+            case START_OBJECT -> branch(here);
+            case START_ARRAY -> series(here);
+            case VALUE_STRING -> new Node.Text(wellFormed(parser.getText()));
+            case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT -> new Node.Decimal(decimal());
+            case VALUE_TRUE -> new Node.Flag(true);
+            case VALUE_FALSE -> new Node.Flag(false);
+            case VALUE_NULL -> new Node.Blank();
+            default -> throw refused("a value is expected");
+        };
+    }
+
+    private Branch branch(Pointer here) throws IOException {
+        Map<String, Node> members = new LinkedHashMap<>();
+        while (parser.nextToken() != JsonToken.END_OBJECT) {
+            String key = wellFormed(parser.currentName());
+            members.put(key, value(parser.nextToken(), here.child(key)));
+        }
+        return new Branch(members);
+    }
+
+    private Node.Series series(Pointer here) throws IOException {
+        List<Node> items = new ArrayList<>();
+        for (JsonToken token = parser.nextToken(); token != JsonToken.END_ARRAY; token = parser.nextToken()) {
+            items.add(value(token, here.child(items.size())));
+        }
+        return new Node.Series(items);
+    }
+
+    private BigDecimal decimal() throws IOException {
+        BigDecimal number = new BigDecimal(parser.getText());
+        if (Math.abs((long) number.scale()) > LARGEST_EXPONENT) {
+            throw refused("a number is too large or too small: " + parser.getText());
+        }
+        return number;
+    }
+
+    /** Escapes can smuggle half a surrogate pair into a text, which no file could then hold. */
+    private String wellFormed(String text) {
+        if (!StandardCharsets.UTF_8.newEncoder().canEncode(text)) {
+            throw refused("half of a surrogate pair stands alone");
+        }
+        return text;
+    }
+
+    private Refused refused(String what) {
+        return new Refused(unreadable(parser.currentLocation(), what));
+    }
+
+    private static Defect unreadable(JsonLocation location, String what) {
+        String line = location == null ? "1" : Integer.toString(location.getLineNr());
+        String column = location == null ? "1" : Integer.toString(location.getColumnNr());
+        return Defect.in("", "json-unreadable", line, column, what.lines().findFirst().orElse(""));
+    }
+}

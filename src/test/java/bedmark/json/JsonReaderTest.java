@@ -1,0 +1,53 @@
+package bedmark.json;
+
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+
+import bedmark.document.Pointer;
+import bedmark.document.Refused;
+import java.nio.charset.StandardCharsets;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+
+class JsonReaderTest {
+    private static byte[] bytes(String text) {
+        return text.getBytes(StandardCharsets.UTF_8);
+    }
+
+    @Test
+    void decimalsKeepTheirTrailingZeros() {
+        byte[] text = bytes("{\"value\":9.50,\"many\":[1,2.00,0.250],\"unknown\":{\"a\":null}}");
+        assertArrayEquals(text, JsonWriter.compact(JsonReader.read(text).root()));
+    }
+
+    @Test
+    void everyValueHasItsPlace() {
+        Document document = JsonReader.read(bytes("{\n  \"a\": [\n    1,\n    {\"b\": true}\n  ]\n}"));
+        assertEquals(4, document.placeOf(Pointer.parse("/a/1/b")).orElseThrow().line());
+        assertEquals(4, document.placeOf(Pointer.parse("/a/1/absent")).orElseThrow().line());
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"", "[]", "{\"a\":1,\"a\":2}", "{\"a\":1e999999999}", "{\"a\":NaN}", "{} {}", "{\"a\":",
+        "{\"a\":\"\\ud800\"}", "{\"a\":1,}", "{\"a\":01}", "{'a':1}"})
+    void whatIsNoStrictObjectIsRefusedWithItsPlace(String text) {
+        Refused refused = assertThrows(Refused.class, () -> JsonReader.read(bytes(text)));
+        assertEquals("json-unreadable", refused.defect().code());
+        assertEquals("1", refused.defect().details().get(0));
+    }
+
+    @Test
+    void whatIsNoUtf8IsRefused() {
+        Refused refused = assertThrows(Refused.class, () -> JsonReader.read(new byte[] {'{', (byte) 0xC3, '}'}));
+        assertEquals("json-not-utf8", refused.defect().code());
+    }
+
+    @Test
+    void nestingHasAnEnd() {
+        String deep = "{\"a\":" + "[".repeat(1000) + "]".repeat(1000) + "}";
+        assertEquals("json-unreadable",
+                assertThrows(Refused.class, () -> JsonReader.read(bytes(deep))).defect().code());
+    }
+}

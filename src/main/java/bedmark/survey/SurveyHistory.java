@@ -11,11 +11,12 @@ import java.util.Optional;
 /**
  * A survey as the fold of its journal entries: what it holds now, how far it is on its way, and every change.
  *
+ * @param base    the survey without its answers: as it was opened, with its photos
  * @param survey  the survey as it stands
  * @param state   how far it is on its way
  * @param changes every answer that was set, oldest first, undone ones among them
  */
-public record SurveyHistory(Survey survey, QueueState state, List<Change> changes) {
+public record SurveyHistory(Branch base, Survey survey, QueueState state, List<Change> changes) {
 
     /**
      * One answer as it was set.
@@ -56,15 +57,19 @@ public record SurveyHistory(Survey survey, QueueState state, List<Change> change
     public static Optional<SurveyHistory> after(Optional<SurveyHistory> history, Entry entry) {
         Act act = entry.act();
         if (act instanceof Act.SurveyOpened opened) {
-            return Optional.of(new SurveyHistory(new Survey(opened.document()), QueueState.OPEN, List.of()));
+            return Optional.of(begun(opened.document(), QueueState.OPEN));
         }
         if (act instanceof Act.RevisionOpened opened) {
-            return Optional.of(new SurveyHistory(new Survey(opened.document()), QueueState.OPEN, List.of()));
+            return Optional.of(begun(opened.document(), QueueState.OPEN));
         }
         if (act instanceof Act.SurveyTaken taken) {
-            return Optional.of(new SurveyHistory(new Survey(taken.document()), QueueState.RECEIVED, List.of()));
+            return Optional.of(begun(taken.document(), QueueState.RECEIVED));
         }
         return history.map(known -> known.next(entry));
+    }
+
+    private static SurveyHistory begun(Branch document, QueueState state) {
+        return new SurveyHistory(document, new Survey(document), state, List.of());
     }
 
     /** The newest change that still counts: what an undo would take back. */
@@ -94,12 +99,14 @@ public record SurveyHistory(Survey survey, QueueState state, List<Change> change
             requireOpen();
             List<Node> photos = new ArrayList<>(survey.document().series("photos"));
             photos.add(attached.photo());
-            return with(survey.document().with("photos", new Node.Series(photos)));
+            Node.Series longer = new Node.Series(photos);
+            return new SurveyHistory(base.with("photos", longer), new Survey(survey.document().with("photos", longer)),
+                    state, changes);
         }
         if (act instanceof Act.SurveyCompleted completed) {
             Branch signed = survey.document().with("completedAt", entry.at().toString())
                     .with("signedOffBy", completed.signedOffBy());
-            return new SurveyHistory(new Survey(signed), state.moveTo(QueueState.COMPLETED), changes);
+            return new SurveyHistory(base, new Survey(signed), state.moveTo(QueueState.COMPLETED), changes);
         }
         if (act instanceof Act.SurveysQueued) {
             return moved(QueueState.QUEUED);
@@ -119,44 +126,36 @@ public record SurveyHistory(Survey survey, QueueState state, List<Change> change
         Optional<Node> before = document.at(set.where());
         List<Change> longer = new ArrayList<>(changes);
         longer.add(new Change(entry.sequence(), entry.at(), entry.person(), set.where(), before, set.answer(), false));
-        return new SurveyHistory(new Survey(put(document, set.where(), set.answer())), state, longer);
+        return new SurveyHistory(base, new Survey(put(document, set.where(), set.answer())), state, longer);
     }
 
-    /**
-     * Takes one change back. A later change of the same place stands; only the newest change of a place gives back
-     * what was there before it.
-     */
+    /** Takes one change back: what the other changes make of the opened survey stands. */
     private SurveyHistory undone(long sequence) {
         requireOpen();
-        List<Change> marked = new ArrayList<>(changes);
-        for (int i = 0; i < marked.size(); i++) {
-            Change change = marked.get(i);
-            if (change.sequence() == sequence && !change.undone()) {
-                marked.set(i, change.takenBack());
-                boolean covered = marked.subList(i + 1, marked.size()).stream()
-                        .anyMatch(later -> !later.undone() && overlaps(later.where(), change.where()));
-                Branch document = survey.document();
-                return new SurveyHistory(covered ? survey
-                        : new Survey(put(document, change.where(), change.before())), state, marked);
+        List<Change> marked = new ArrayList<>();
+        boolean found = false;
+        Branch document = base;
+        for (Change change : changes) {
+            boolean meant = change.sequence() == sequence && !change.undone();
+            found |= meant;
+            Change kept = meant ? change.takenBack() : change;
+            marked.add(kept);
+            if (!kept.undone()) {
+                document = put(document, kept.where(), kept.after());
             }
         }
-        throw new IllegalStateException("entry " + sequence + " is no change that can be undone");
-    }
-
-    private static boolean overlaps(Pointer one, Pointer other) {
-        return one.holds(other) || other.holds(one);
+        if (!found) {
+            throw new IllegalStateException("entry " + sequence + " is no change that can be undone");
+        }
+        return new SurveyHistory(base, new Survey(document), state, marked);
     }
 
     private static Branch put(Branch document, Pointer where, Optional<Node> answer) {
         return answer.map(node -> document.with(where, node)).orElseGet(() -> document.without(where));
     }
 
-    private SurveyHistory with(Branch document) {
-        return new SurveyHistory(new Survey(document), state, changes);
-    }
-
     private SurveyHistory moved(QueueState next) {
-        return new SurveyHistory(survey, state.moveTo(next), changes);
+        return new SurveyHistory(base, survey, state.moveTo(next), changes);
     }
 
     private void requireOpen() {

@@ -1,0 +1,119 @@
+package bedmark.survey;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.document.Node;
+import bedmark.document.Pointer;
+import java.time.OffsetDateTime;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.Random;
+import java.util.UUID;
+import org.junit.jupiter.api.Test;
+
+class SurveyHistoryTest {
+    private static final UUID ID = UUID.fromString("00000000-0000-4000-8000-00000000000a");
+    private static final OffsetDateTime TIME = OffsetDateTime.parse("2026-03-01T08:30:00+01:00");
+    private static final Pointer SPEED = Pointer.parse("/readings/beltSpeed");
+    private static final Pointer NOTES = Pointer.parse("/notes");
+
+    private final List<Entry> entries = new ArrayList<>();
+
+    private SurveyHistory now() {
+        return SurveyHistory.fold(entries).orElseThrow();
+    }
+
+    private void act(Act act) {
+        entries.add(new Entry(entries.size() + 1, TIME.plusSeconds(entries.size()), "A. Person", ID, act));
+    }
+
+    private void open() {
+        act(new Act.SurveyOpened(ID, Survey.begin(ID, "r", "tp", "loading-zone", 1, "A. Person", TIME).document()));
+    }
+
+    private void set(Pointer where, String answer) {
+        act(new Act.AnswerSet(ID, where, Optional.of(Node.text(answer))));
+    }
+
+    @Test
+    void answersStandAsLastSet() {
+        open();
+        set(SPEED, "one");
+        set(SPEED, "two");
+        assertEquals(Optional.of(Node.text("two")), now().survey().document().at(SPEED));
+        assertEquals(Optional.of(Node.text("one")), now().changes().get(1).before());
+    }
+
+    @Test
+    void undoingEverythingGivesTheSurveyAsOpened() {
+        Random random = new Random(7);
+        open();
+        Survey opened = now().survey();
+        for (int i = 0; i < 60; i++) {
+            Pointer where = random.nextBoolean() ? SPEED : NOTES;
+            if (random.nextInt(5) == 0) {
+                act(new Act.AnswerSet(ID, where, Optional.empty()));
+            } else {
+                set(where, "answer " + i);
+            }
+        }
+        while (now().newest().isPresent()) {
+            act(new Act.AnswerUndone(ID, now().newest().orElseThrow().sequence()));
+        }
+        assertEquals(opened, now().survey());
+        assertTrue(now().changes().stream().allMatch(SurveyHistory.Change::undone));
+        assertEquals(60, now().changes().size());
+    }
+
+    @Test
+    void undoingAnOlderChangeLeavesALaterOneOfTheSamePlace() {
+        open();
+        set(SPEED, "one");
+        set(SPEED, "two");
+        act(new Act.AnswerUndone(ID, 2));
+        assertEquals(Optional.of(Node.text("two")), now().survey().document().at(SPEED));
+    }
+
+    @Test
+    void undoneOlderChangeDoesNotComeBackWithTheLaterOne() {
+        open();
+        set(SPEED, "one");
+        set(SPEED, "two");
+        act(new Act.AnswerUndone(ID, 2));
+        act(new Act.AnswerUndone(ID, 3));
+        assertEquals(Optional.empty(), now().survey().document().at(SPEED));
+    }
+
+    @Test
+    void completedSurveyTakesNoMoreAnswers() {
+        open();
+        act(new Act.SurveyCompleted(ID, "A. Person"));
+        set(SPEED, "late");
+        assertThrows(IllegalStateException.class, this::now);
+    }
+
+    @Test
+    void surveyMovesForwardOnly() {
+        open();
+        act(new Act.SurveyCompleted(ID, "A. Person"));
+        assertEquals(QueueState.COMPLETED, now().state());
+        act(new Act.SurveysQueued(List.of(ID)));
+        act(new Act.PackExported(List.of(ID), "p.zip", "00", "folder"));
+        act(new Act.PackExported(List.of(ID), "p.zip", "00", "folder"));
+        assertEquals(QueueState.EXPORTED, now().state());
+        act(new Act.SurveysQueued(List.of(ID)));
+        assertThrows(IllegalStateException.class, this::now);
+    }
+
+    @Test
+    void historyOfAFieldHoldsWhatLiesBelowIt() {
+        open();
+        set(SPEED.child("value"), "2");
+        set(NOTES, "n");
+        assertEquals(1, now().of(SPEED).size());
+        assertEquals(1, now().of(Pointer.parse("/readings")).size());
+    }
+}

@@ -1,0 +1,40 @@
+package bedmark.engine;
+
+import bedmark.engine.uncertainty.ImpossibleReading;
+import java.util.List;
+
+/** The way into the engine: pure functions. */
+public final class Engine {
+    private Engine() {
+    }
+
+    /**
+     * Assesses the only loading zone of a conveyor.
+     *
+     * @throws ImpossibleReading where a reading cannot be
+     */
+    public static Assessment assess(LoadingZone zone, Settings settings) {
+        return assessConveyor(List.of(zone), 0, settings).get(0);
+    }
+
+    /**
+     * Assesses the loading zones of one conveyor, whose skirts load one drive together.
+     *
+     * @param zones      those of which a survey can be used, each with the same conveyor
+     * @param unsurveyed how many more loading zones the conveyor has
+     * @return the assessments in the order of the zones
+     * @throws ImpossibleReading where a reading cannot be; {@link #check} tells before
+     */
+    public static List<Assessment> assessConveyor(List<LoadingZone> zones, int unsurveyed, Settings settings) {
+        throw new UnsupportedOperationException();
+    }
+
+    /**
+     * Refuses a zone that cannot be.
+     *
+     * @throws ImpossibleReading with the first reason
+     */
+    public static void check(LoadingZone zone) {
+        throw new UnsupportedOperationException();
+    }
+}

@@ -1,0 +1,31 @@
+package bedmark.engine.drag;
+
+import java.util.Optional;
+import java.util.stream.Stream;
+
+/** The methods for the drag of the material on the skirtboards. */
+public enum DragMethod {
+    /** The skirtboard friction factor of the table. */
+    TABULATED("tabulated"),
+    /** Active wall pressure after Rankine. */
+    RANKINE("rankine"),
+    /** The special resistance of ISO 5048 and DIN 22101. */
+    ISO_5048("iso-5048"),
+    /** Fitted from the site's own drive readings. */
+    SITE("site");
+
+    private final String code;
+
+    DragMethod(String code) {
+        this.code = code;
+    }
+
+    /** The method of that code. */
+    public static Optional<DragMethod> ofCode(String code) {
+        return Stream.of(values()).filter(method -> method.code.equals(code)).findFirst();
+    }
+
+    public String code() {
+        return code;
+    }
+}

@@ -191,13 +191,7 @@ public record Branch(Map<String, Node> members) implements Node {
 
     /** The quantity under a key. */
     public Optional<Quantity> quantity(String key) {
-        return branch(key).map(branch -> {
-            try {
-                return branch.asQuantity();
-            } catch (Refused e) {
-                throw new Refused(e.defect().below(Pointer.of(key)), e);
-            }
-        });
+        return branch(key).map(branch -> Refused.below(Pointer.of(key), branch::asQuantity));
     }
 
     /** This object read as a quantity; its keys are those of the data page. */

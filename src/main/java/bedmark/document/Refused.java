@@ -1,5 +1,7 @@
 package bedmark.document;
 
+import java.util.function.Supplier;
+
 /** An input is refused; nothing was changed. The one reason is the defect. */
 public final class Refused extends RuntimeException {
     private final transient Defect defect;
@@ -12,6 +14,15 @@ public final class Refused extends RuntimeException {
     public Refused(Defect defect, Throwable cause) {
         this(defect);
         initCause(cause);
+    }
+
+    /** Reads something that lies at {@code base}, so that a refusal names its whole place. */
+    public static <T> T below(Pointer base, Supplier<T> reading) {
+        try {
+            return reading.get();
+        } catch (Refused e) {
+            throw new Refused(e.defect.below(base), e);
+        }
     }
 
     public Defect defect() {

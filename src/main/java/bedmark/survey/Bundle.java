@@ -37,7 +37,8 @@ public record Bundle(Branch document) {
         List<Branch> surveys = document.branches("surveys");
         for (int i = 0; i < surveys.size(); i++) {
             Pointer place = Pointer.of("surveys").child(i);
-            Survey survey = survey(surveys.get(i), place);
+            Branch held = surveys.get(i);
+            Survey survey = Refused.below(place, () -> new Survey(held));
             if (!seen.add(survey.id())) {
                 throw new Refused(Defect.at(place.child("id"), "survey-twice", survey.id().toString()));
             }
@@ -47,22 +48,10 @@ public record Bundle(Branch document) {
         }
     }
 
-    private static Survey survey(Branch document, Pointer place) {
-        try {
-            return new Survey(document);
-        } catch (Refused e) {
-            throw new Refused(e.defect().below(place), e);
-        }
-    }
-
     private static Register register(Branch document) {
         Branch plant = document.branch("plant")
                 .orElseThrow(() -> new Refused(Defect.at(Pointer.of("plant"), "key-absent", "plant")));
-        try {
-            return new Register(plant);
-        } catch (Refused e) {
-            throw new Refused(e.defect().below(Pointer.of("plant")), e);
-        }
+        return Refused.below(Pointer.of("plant"), () -> new Register(plant));
     }
 
     /**

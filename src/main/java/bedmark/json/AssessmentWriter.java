@@ -1,0 +1,147 @@
+package bedmark.json;
+
+import bedmark.document.Branch;
+import bedmark.document.Node;
+import bedmark.engine.Assessment;
+import bedmark.engine.Assumption;
+import bedmark.engine.Result;
+import bedmark.engine.uncertainty.Estimate;
+import bedmark.engine.uncertainty.Share;
+import bedmark.engine.verdict.AllowedDepth;
+import bedmark.engine.verdict.Finding;
+import bedmark.engine.verdict.Remedy;
+import bedmark.survey.Assessor.Assessed;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.function.Function;
+
+/** Assessments as documents: SI, plain numbers, the unit in the key; what could not be computed is absent. */
+public final class AssessmentWriter {
+
+    /** The format of a list of assessments. */
+    public static final String FORMAT = "bedmark.assessment";
+    private static final int VERSION = 1;
+
+    private AssessmentWriter() {
+    }
+
+    /**
+     * The assessments of a bundle's surveys, in its order.
+     *
+     * @param notice the caution in one sentence
+     */
+    public static Branch list(List<Assessed> assessed, String notice) {
+        return Branch.EMPTY.with("format", FORMAT).with("version", Node.number(VERSION)).with("notice", notice)
+                .with("surveys", series(assessed, one -> Branch.EMPTY
+                        .with("id", one.survey().id().toString())
+                        .with("revision", Node.number(one.survey().revision()))
+                        .with("transfer", one.survey().transfer())
+                        .with("assessment", write(one.assessment()))));
+    }
+
+    /** One assessment. */
+    public static Branch write(Assessment assessment) {
+        Branch branch = Branch.EMPTY.with("level", assessment.level().code());
+        if (assessment.levelAtDesignFeed().isPresent()) {
+            branch = branch.with("levelAtDesignFeed", assessment.levelAtDesignFeed().get().code());
+        }
+        if (assessment.method().isPresent()) {
+            branch = branch.with("method", assessment.method().get().code());
+        }
+        Branch uncertainty = Branch.EMPTY;
+        for (Map.Entry<Result, Estimate> result : assessment.results().entrySet()) {
+            branch = branch.with(result.getKey().key(), number(result.getValue().value()));
+            uncertainty = uncertainty.with(result.getKey().key(), number(result.getValue().standardUncertainty()));
+        }
+        if (assessment.energyKind().isPresent()) {
+            branch = branch.with("energyIs", assessment.energyKind().get().code());
+        }
+        if (assessment.leading().isPresent()) {
+            branch = branch.with("leading", assessment.leading().get().code());
+        }
+        branch = branch
+                .with("methods", series(assessment.methods().entrySet(), method -> Branch.EMPTY
+                        .with("method", method.getKey().code())
+                        .with("materialDragN", number(method.getValue().value()))
+                        .with("standardUncertaintyN", number(method.getValue().standardUncertainty()))))
+                .with("uncertainty", uncertainty)
+                .with("powerShares", series(assessment.powerShares(), AssessmentWriter::share))
+                .with("bedProfile", series(assessment.profile(), point -> Branch.EMPTY
+                        .with("positionM", number(point.position()))
+                        .with("depthM", number(point.depth().value()))
+                        .with("standardUncertaintyM", number(point.depth().standardUncertainty()))))
+                .with("findings", series(assessment.findings(), AssessmentWriter::finding));
+        if (!assessment.findingsAtDesign().isEmpty()) {
+            branch = branch.with("findingsAtDesignFeed",
+                    series(assessment.findingsAtDesign(), AssessmentWriter::finding));
+        }
+        branch = branch.with("allowedDepths", series(assessment.allowedDepths(), AssessmentWriter::allowed))
+                .with("remedies", series(assessment.remedies(), AssessmentWriter::remedy))
+                .with("assumptions", series(assessment.assumptions(), AssessmentWriter::assumption))
+                .with("missing", texts(assessment.missing()));
+        return assessment.repeat().isPresent() ? branch.with("repeat", assessment.repeat().get()) : branch;
+    }
+
+    private static Branch share(Share share) {
+        return Branch.EMPTY.with("reading", share.reading()).with("share", number(share.share()));
+    }
+
+    private static Branch finding(Finding finding) {
+        Branch branch = Branch.EMPTY.with("code", finding.code()).with("level", finding.level().code())
+                .with("observed", number(finding.observed())).with("unit", finding.unit())
+                .with("standardUncertainty", number(finding.standardUncertainty()));
+        branch = optional(branch, "near", finding.near());
+        branch = optional(branch, "overloaded", finding.overloaded());
+        branch = optional(branch, "probabilityNear", finding.probabilityNear());
+        branch = optional(branch, "probabilityOverloaded", finding.probabilityOverloaded());
+        return branch.with("action", finding.action()).with("source", finding.source())
+                .with("assumption", Node.flag(finding.assumption()));
+    }
+
+    private static Branch allowed(AllowedDepth allowed) {
+        Branch branch = Branch.EMPTY.with("code", allowed.rule().code());
+        return optional(optional(branch, "nearM", allowed.near()), "overloadedM", allowed.overloaded());
+    }
+
+    private static Branch remedy(Remedy remedy) {
+        Branch branch = optional(Branch.EMPTY.with("code", remedy.code()), "change", remedy.change())
+                .with("unit", remedy.unit())
+                .with("meanDepthM", number(remedy.meanDepth()))
+                .with("skirtDragN", number(remedy.skirtDrag()))
+                .with("skirtPowerW", number(remedy.skirtPower()));
+        branch = optional(optional(branch, "drivePowerW", remedy.drivePower()), "savedWhPerYear", remedy.savedWh())
+                .with("ranked", Node.flag(remedy.ranked()));
+        return remedy.refusedBecause().isPresent()
+                ? branch.with("refusedBecause", remedy.refusedBecause().get().code()) : branch;
+    }
+
+    private static Branch assumption(Assumption assumption) {
+        Branch branch = Branch.EMPTY.with("code", assumption.code());
+        return assumption.arguments().isEmpty() ? branch
+                : branch.with("arguments", texts(assumption.arguments()));
+    }
+
+    private static Branch optional(Branch branch, String key, OptionalDouble number) {
+        return number.isPresent() ? branch.with(key, number(number.getAsDouble())) : branch;
+    }
+
+    /** The shortest decimal that gives the same double back. */
+    private static Node number(double value) {
+        return Node.number(new BigDecimal(Double.toString(value)));
+    }
+
+    private static Node texts(Iterable<String> texts) {
+        List<Node> items = new ArrayList<>();
+        texts.forEach(text -> items.add(Node.text(text)));
+        return new Node.Series(items);
+    }
+
+    private static <T> Node series(Iterable<T> things, Function<T, Branch> write) {
+        List<Node> items = new ArrayList<>();
+        things.forEach(thing -> items.add(write.apply(thing)));
+        return new Node.Series(items);
+    }
+}

@@ -1,0 +1,138 @@
+package bedmark.survey;
+
+import static bedmark.document.Refused.below;
+
+import bedmark.document.Defect;
+import bedmark.document.Pointer;
+import bedmark.document.Refused;
+import bedmark.engine.Assessment;
+import bedmark.engine.Engine;
+import bedmark.engine.LoadingZone;
+import bedmark.engine.Settings;
+import bedmark.engine.uncertainty.ImpossibleReading;
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.UUID;
+
+/**
+ * Judges surveys by a register. The loading zones of one conveyor that were surveyed on the same round load one
+ * drive together and are judged together.
+ */
+public final class Assessor {
+    private final Register register;
+    private final Settings settings;
+
+    /** A survey with what the engine found. */
+    public record Assessed(Survey survey, Assessment assessment) {
+    }
+
+    /**
+     * Judges by the register's materials, geometry, limits, seal rates and instruments.
+     *
+     * @throws Refused where the site's own settings cannot be; the place is a pointer within the plant
+     */
+    public Assessor(Register register) {
+        this.register = register;
+        this.settings = SiteSettings.of(register.document());
+    }
+
+    public Settings settings() {
+        return settings;
+    }
+
+    /**
+     * What the engine sees of a survey.
+     *
+     * @throws Refused where a reading cannot be; the place is a pointer within the survey
+     */
+    public LoadingZone zone(Survey survey) {
+        LoadingZone zone = ZoneMapping.map(survey, register, settings.instruments());
+        try {
+            Engine.check(zone);
+        } catch (ImpossibleReading e) {
+            throw refused(e);
+        }
+        return zone;
+    }
+
+    /** The material that a survey is judged by. */
+    public Optional<Register.Material> material(Survey survey) {
+        return register.transfer(survey.transfer())
+                .flatMap(transfer -> ZoneMapping.material(survey, transfer, register));
+    }
+
+    /**
+     * Judges all surveys of a bundle.
+     *
+     * @return one assessment for each survey, in the same order
+     * @throws Refused where a reading cannot be; the place is a pointer within {@code /surveys}
+     */
+    public List<Assessed> assess(List<Survey> surveys) {
+        Set<UUID> superseded = new HashSet<>();
+        surveys.forEach(survey -> survey.supersedes().ifPresent(superseded::add));
+        Map<Pointer, List<Survey>> drives = new LinkedHashMap<>();
+        for (Survey survey : surveys) {
+            if (!superseded.contains(survey.id())) {
+                drives.computeIfAbsent(drive(survey), key -> new ArrayList<>()).add(survey);
+            }
+        }
+        List<Assessed> assessed = new ArrayList<>();
+        for (int i = 0; i < surveys.size(); i++) {
+            Survey survey = surveys.get(i);
+            List<Survey> companions = drives.getOrDefault(drive(survey), List.of());
+            assessed.add(below(Pointer.of("surveys").child(i), () ->
+                    new Assessed(survey, assess(survey, companions))));
+        }
+        return assessed;
+    }
+
+    /**
+     * Judges one survey.
+     *
+     * @param companions surveys of the same round at the same conveyor; the survey itself and others of its own
+     *                   transfer point among them do not count, nor does one that cannot be
+     * @throws Refused where a reading cannot be; the place is a pointer within the survey
+     */
+    public Assessment assess(Survey survey, Collection<Survey> companions) {
+        List<LoadingZone> zones = new ArrayList<>();
+        zones.add(zone(survey));
+        Map<String, LoadingZone> others = new LinkedHashMap<>();
+        for (Survey companion : companions) {
+            if (!companion.transfer().equals(survey.transfer())) {
+                sound(companion).ifPresent(zone -> others.put(companion.transfer(), zone));
+            }
+        }
+        zones.addAll(others.values());
+        int all = register.transfer(survey.transfer()).map(transfer -> register.zonesOf(transfer.conveyor()).size())
+                .orElse(zones.size());
+        try {
+            return Engine.assessConveyor(zones, all - zones.size(), settings).get(0);
+        } catch (ImpossibleReading e) {
+            throw refused(e);
+        }
+    }
+
+    /** A companion that cannot be is judged in its own place; here it is as good as not surveyed. */
+    private Optional<LoadingZone> sound(Survey companion) {
+        try {
+            return Optional.of(zone(companion));
+        } catch (Refused e) {
+            return Optional.empty();
+        }
+    }
+
+    private Pointer drive(Survey survey) {
+        return Pointer.of(survey.round().orElse(""),
+                register.transfer(survey.transfer()).map(Register.Transfer::conveyor).orElse(""));
+    }
+
+    private static Refused refused(ImpossibleReading e) {
+        return new Refused(Defect.in(e.readingName(), e.code(), e.arguments().toArray(String[]::new)), e);
+    }
+}

@@ -1,0 +1,139 @@
+package bedmark.survey;
+
+import static bedmark.document.Refused.below;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Pointer;
+import bedmark.document.Refused;
+import bedmark.engine.Settings;
+import bedmark.engine.drag.DragMethod;
+import bedmark.engine.seal.SealCondition;
+import bedmark.engine.seal.SealRates;
+import bedmark.engine.seal.SealType;
+import bedmark.engine.uncertainty.ImpossibleReading;
+import bedmark.engine.uncertainty.Instrument;
+import bedmark.engine.uncertainty.Instruments;
+import bedmark.engine.verdict.Certainty;
+import bedmark.engine.verdict.Limit;
+import bedmark.engine.verdict.Limits;
+import bedmark.engine.verdict.Rule;
+import bedmark.quantity.Quantity;
+import java.math.BigDecimal;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.Function;
+
+/**
+ * What a site decided, read from its register: {@code limits}, {@code sealRates}, {@code instruments} and
+ * {@code method} of the plant. What it leaves out keeps the default of the engineering page.
+ */
+final class SiteSettings {
+    private static final String LIMITS = "limits";
+    private static final String CERTAINTY = "certainty";
+
+    private SiteSettings() {
+    }
+
+    /**
+     * The settings of a plant.
+     *
+     * @throws Refused where a row names what the engine does not know, or a number cannot be; the place is a pointer
+     *                 within the plant
+     */
+    static Settings of(Branch plant) {
+        try {
+            Settings settings = Settings.standard().with(limits(plant)).with(certainty(plant))
+                    .with(sealRates(plant)).with(instruments(plant));
+            return plant.text("method").map(code -> settings.with(
+                    word(DragMethod::ofCode, code, Pointer.of("method")))).orElse(settings);
+        } catch (ImpossibleReading e) {
+            throw new Refused(Defect.in(e.readingName().replaceFirst("^/plant", ""), e.code(),
+                    e.arguments().toArray(String[]::new)), e);
+        }
+    }
+
+    private static Limits limits(Branch plant) {
+        Branch rows = plant.branch(LIMITS).orElse(Branch.EMPTY);
+        Limits limits = Limits.standard();
+        for (String code : rows.members().keySet()) {
+            if (code.equals(CERTAINTY)) {
+                continue;
+            }
+            Pointer place = Pointer.of(LIMITS, code);
+            Rule rule = word(Rule::ofCode, code, place);
+            Branch row = below(place, () -> rows.branch(code).orElse(Branch.EMPTY));
+            Limit known = rule.limit();
+            OptionalDouble near = below(place, () -> number(row, "near", known.near()));
+            OptionalDouble overloaded = below(place, () -> number(row, "overloaded", known.overloaded()));
+            boolean moved = !near.equals(known.near()) || !overloaded.equals(known.overloaded());
+            Limit limit = moved ? Limit.ofSite(near, overloaded) : known;
+            boolean enabled = below(place, () -> row.flag("enabled")).orElse(true);
+            limits = limits.with(rule, enabled ? limit : limit.off());
+        }
+        return limits;
+    }
+
+    private static Certainty certainty(Branch plant) {
+        Branch row = plant.branch(LIMITS).flatMap(limits -> limits.branch(CERTAINTY)).orElse(Branch.EMPTY);
+        Certainty standard = Certainty.standard();
+        Pointer place = Pointer.of(LIMITS, CERTAINTY);
+        return below(place, () -> new Certainty(number(row, "overloaded").orElse(standard.overloaded()),
+                number(row, "undecided").orElse(standard.undecided()), number(row, "near").orElse(standard.near())));
+    }
+
+    private static SealRates sealRates(Branch plant) {
+        SealRates rates = SealRates.standard();
+        List<Branch> rows = plant.branches("sealRates");
+        for (int i = 0; i < rows.size(); i++) {
+            Pointer place = Pointer.of("sealRates").child(i);
+            Branch row = rows.get(i);
+            Optional<Double> rate = below(place, () -> row.quantity("rate")).map(Quantity::si);
+            if (rate.isPresent()) {
+                rates = new SealRates(rate.get(), rates.multipliers());
+                continue;
+            }
+            SealType type = word(SealType::ofCode, text(row, "type", place), place.child("type"));
+            SealCondition condition = word(SealCondition::ofCode, text(row, "condition", place),
+                    place.child("condition"));
+            double multiplier = below(place, () -> number(row, "multiplier")).orElseThrow(() ->
+                    new Refused(Defect.at(place, "key-absent", "multiplier")));
+            rates = rates.with(type, condition, multiplier);
+        }
+        return rates;
+    }
+
+    private static Instruments instruments(Branch plant) {
+        Instruments instruments = Instruments.standard();
+        List<Branch> rows = plant.branches("instruments");
+        for (int i = 0; i < rows.size(); i++) {
+            Pointer place = Pointer.of("instruments").child(i);
+            Branch row = rows.get(i);
+            Instrument instrument = word(Instrument::ofCode, text(row, "kind", place), place.child("kind"));
+            Optional<Double> spread = below(place, () -> instrument.relative() ? number(row, "relative")
+                    : row.quantity("standardUncertainty").map(Quantity::si));
+            String key = instrument.relative() ? "relative" : "standardUncertainty";
+            instruments = instruments.with(instrument, spread.orElseThrow(() ->
+                    new Refused(Defect.at(place, "key-absent", key))));
+        }
+        return instruments;
+    }
+
+    private static String text(Branch row, String key, Pointer place) {
+        return below(place, () -> row.text(key)).orElseThrow(() ->
+                new Refused(Defect.at(place, "key-absent", key)));
+    }
+
+    private static <T> T word(Function<String, Optional<T>> words, String code, Pointer place) {
+        return words.apply(code).orElseThrow(() -> new Refused(Defect.at(place, "word-unknown", code)));
+    }
+
+    private static Optional<Double> number(Branch row, String key) {
+        return row.number(key).map(BigDecimal::doubleValue);
+    }
+
+    private static OptionalDouble number(Branch row, String key, OptionalDouble known) {
+        return number(row, key).map(OptionalDouble::of).orElse(known);
+    }
+}

@@ -1,0 +1,245 @@
+package bedmark.survey;
+
+import static bedmark.document.Refused.below;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Node;
+import bedmark.document.Pointer;
+import bedmark.document.Refused;
+import bedmark.engine.Datum;
+import bedmark.engine.LoadingZone;
+import bedmark.engine.bed.DepthMethod;
+import bedmark.engine.bed.Station;
+import bedmark.engine.flow.SpeedClass;
+import bedmark.engine.seal.SealCondition;
+import bedmark.engine.seal.SealSegment;
+import bedmark.engine.seal.SealType;
+import bedmark.engine.seal.Side;
+import bedmark.engine.uncertainty.Instrument;
+import bedmark.engine.uncertainty.Instruments;
+import bedmark.engine.uncertainty.Reading;
+import bedmark.quantity.BeltState;
+import bedmark.quantity.Dimension;
+import bedmark.quantity.Quality;
+import bedmark.quantity.Quantity;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.Function;
+
+/**
+ * The one way from a survey and its register to the engine's loading zone: every single number goes by its
+ * {@link Datum}, whose place says where it stands.
+ */
+final class ZoneMapping {
+    private static final String POSITION = "position";
+    private static final String DEPTH = "depth";
+    private static final String DEPTH_METHOD = "depthMethod";
+
+    private final Map<String, Branch> sources;
+    private final Instruments instruments;
+    private final List<String> unfinished = new ArrayList<>();
+
+    private ZoneMapping(Map<String, Branch> sources, Instruments instruments) {
+        this.sources = sources;
+        this.instruments = instruments;
+    }
+
+    /**
+     * Maps one survey.
+     *
+     * @throws Refused where a value has the wrong kind or dimension, or a word is unknown; the place is a pointer
+     *                 within the survey, or below {@code /conveyor}, {@code /transfer}, {@code /material}
+     */
+    static LoadingZone map(Survey survey, Register register, Instruments instruments) {
+        Register.Transfer transfer = register.transfer(survey.transfer()).orElseThrow(() ->
+                new Refused(Defect.at(Pointer.of("transfer"), "transfer-unknown", survey.transfer())));
+        return new ZoneMapping(Map.of(
+                "readings", survey.readings(),
+                "transfer", transfer.document(),
+                "conveyor", register.conveyorOf(transfer).document(),
+                "material", material(survey, transfer, register).map(Register.Material::document)
+                        .orElse(Branch.EMPTY)), instruments).zone();
+    }
+
+    /** The material that really ran, else the one that the register expects. */
+    static Optional<Register.Material> material(Survey survey, Register.Transfer transfer, Register register) {
+        Optional<String> running = below(Survey.READINGS, () -> survey.readings().text("materialRunning"));
+        running.filter(id -> !register.materials().containsKey(id)).ifPresent(id -> {
+            throw new Refused(Defect.at(Survey.READINGS.child("materialRunning"), "material-unknown", id));
+        });
+        return running.or(transfer::material).map(register.materials()::get);
+    }
+
+    /**
+     * The dimension that a datum must have; nothing where it is a plain number. A new number of the engine is one
+     * row here.
+     */
+    static Optional<Dimension> dimension(Datum datum) {
+        return switch (datum) {
+            case ZONE_LENGTH, TIMED_BELT_LENGTH, PULLEY_DIAMETER, READ_SPACING, READ_HEIGHT, BELT_WIDTH, CENTRE_ROLL,
+                    BELT_LENGTH, DESIGN_BED_DEPTH, REGISTER_SPACING, REGISTER_HEIGHT, REGISTER_ZONE_LENGTH,
+                    IMPACT_LENGTH, LUMP_SIZE -> Optional.of(Dimension.LENGTH);
+            case BELT_SPEED, DESIGN_SPEED, FEED_VELOCITY -> Optional.of(Dimension.SPEED);
+            case TIMED_ELAPSED -> Optional.of(Dimension.TIME);
+            case PULLEY_ROTATION -> Optional.of(Dimension.FREQUENCY);
+            case THROUGHPUT, DESIGN_THROUGHPUT -> Optional.of(Dimension.MASS_FLOW);
+            case RUNNING_POWER, RATED_POWER -> Optional.of(Dimension.POWER);
+            case TROUGH_ANGLE, INCLINE, ANGLE_OF_REPOSE, SURCHARGE_ANGLE -> Optional.of(Dimension.ANGLE);
+            case BULK_DENSITY -> Optional.of(Dimension.DENSITY);
+            case SKIRT_POWER_BUDGET -> Optional.of(Dimension.RATIO);
+            case TIMED_REVOLUTIONS, DRIVE_EFFICIENCY, MOTOR_EFFICIENCY, LOADED_HOURS, SKIRT_FRICTION_FACTOR,
+                    WALL_FRICTION -> Optional.empty();
+        };
+    }
+
+    private LoadingZone zone() {
+        Map<Datum, Reading> data = new EnumMap<>(Datum.class);
+        for (Datum datum : Datum.values()) {
+            number(datum).ifPresent(reading -> data.put(datum, reading));
+        }
+        LoadingZone zone = LoadingZone.UNKNOWN.with(data).withStations(stations()).withSeals(seals())
+                .withUnfinished(unfinished);
+        if (flag("transfer", "highAirFlow")) {
+            zone = zone.withMark(LoadingZone.Mark.HIGH_AIR_FLOW);
+        }
+        if (flag("material", "freeFlowing")) {
+            zone = zone.withMark(LoadingZone.Mark.FREE_FLOWING);
+        }
+        Optional<SpeedClass> speedClass = word(sources.get("material"), Pointer.of("material"), "speedClass",
+                SpeedClass::ofCode);
+        return speedClass.isPresent() ? zone.withSpeedClass(speedClass.get()) : zone;
+    }
+
+    private boolean flag(String source, String key) {
+        return below(Pointer.of(source), () -> sources.get(source).flag(key)).orElse(false);
+    }
+
+    private Optional<Reading> number(Datum datum) {
+        Pointer place = Pointer.parse(datum.pointer());
+        Branch source = sources.get(place.tokens().get(0));
+        Pointer inside = new Pointer(place.tokens().subList(1, place.tokens().size()));
+        Optional<Node> node = source.at(inside).filter(found -> !(found instanceof Node.Blank));
+        if (node.isEmpty()) {
+            return Optional.empty();
+        }
+        Branch holder = Branch.EMPTY.with(place.last(), node.get());
+        Pointer base = new Pointer(place.tokens().subList(0, place.tokens().size() - 1));
+        if (datum == Datum.SKIRT_POWER_BUDGET) {
+            return Optional.of(budget(below(base, () -> holder.quantity(place.last())).orElseThrow(), place));
+        }
+        return below(base, () -> dimension(datum)
+                .map(dimension -> holder.quantity(place.last())
+                        .map(quantity -> reading(place, quantity, dimension, datum.instrument())))
+                .orElseGet(() -> holder.number(place.last())
+                        .map(value -> instruments.reading(place.toString(), value.doubleValue(), datum.instrument()))));
+    }
+
+    /** A budget is a share of the rated power, or a power that is one. */
+    private Reading budget(Quantity budget, Pointer place) {
+        double share = budget.si();
+        if (budget.unit().dimension() == Dimension.POWER) {
+            double rated = below(Pointer.of("conveyor"), () -> sources.get("conveyor").quantity("ratedPower"))
+                    .map(Quantity::si).filter(power -> power > 0)
+                    .orElseThrow(() -> new Refused(Defect.at(Pointer.of("conveyor"), "key-absent", "ratedPower")));
+            share = budget.si() / rated;
+        } else if (budget.unit().dimension() != Dimension.RATIO) {
+            throw new Refused(Defect.at(place.child("unit"), "unit-of-wrong-kind", budget.unit().code()));
+        }
+        return instruments.reading(place.toString(), share, Instrument.EXACT);
+    }
+
+    private Reading reading(Pointer place, Quantity quantity, Dimension dimension, Instrument instrument) {
+        if (quantity.unit().dimension() != dimension) {
+            throw new Refused(Defect.at(Pointer.of(place.last(), "unit"), "unit-of-wrong-kind",
+                    quantity.unit().code()));
+        }
+        double value = quantity.si();
+        return quantity.standardUncertaintySi()
+                .map(uncertainty -> new Reading(place.toString(), value, uncertainty))
+                .orElseGet(() -> instruments.reading(place.toString(), value, instrument));
+    }
+
+    private List<Station> stations() {
+        Branch readings = sources.get("readings");
+        Optional<DepthMethod> common = word(readings, Survey.READINGS, DEPTH_METHOD, DepthMethod::ofCode);
+        List<Branch> rows = below(Survey.READINGS, () -> readings.branches("bedDepths"));
+        List<Station> stations = new ArrayList<>();
+        for (int i = 0; i < rows.size(); i++) {
+            Pointer place = Survey.READINGS.child("bedDepths").child(i);
+            Branch row = rows.get(i);
+            Optional<Quantity> position = required(row, place, POSITION);
+            Optional<Quantity> depth = required(row, place, DEPTH);
+            DepthMethod method = word(row, place, DEPTH_METHOD, DepthMethod::ofCode).or(() -> common)
+                    .orElse(DepthMethod.AT_BOARD);
+            if (position.isPresent() && depth.isPresent()) {
+                stations.add(below(place, () -> new Station(
+                        reading(place.child(POSITION), position.get(), Dimension.LENGTH, Instrument.EXACT),
+                        reading(place.child(DEPTH), depth.get(), Dimension.LENGTH, instrument(depth.get(), method)),
+                        method)));
+            }
+        }
+        stations.sort(Comparator.comparingDouble(station -> station.position().value()));
+        return stations;
+    }
+
+    /** A depth on a running belt is an estimate whatever its mark says; so is a wear line, which records history. */
+    private static Instrument instrument(Quantity depth, DepthMethod method) {
+        return switch (quality(depth, method)) {
+            case MEASURED -> Instrument.DEPTH_MEASURED;
+            case ESTIMATED -> Instrument.DEPTH_ESTIMATED;
+            case SUSPECT -> Instrument.DEPTH_SUSPECT;
+        };
+    }
+
+    private static Quality quality(Quantity depth, DepthMethod method) {
+        Quality marked = depth.quality().orElse(Quality.MEASURED);
+        boolean sighted = method == DepthMethod.WEAR_LINE || depth.beltState().filter(BeltState::running).isPresent();
+        return sighted && marked == Quality.MEASURED ? Quality.ESTIMATED : marked;
+    }
+
+    private List<SealSegment> seals() {
+        List<Branch> rows = below(Survey.READINGS, () -> sources.get("readings").branches("seals"));
+        List<SealSegment> seals = new ArrayList<>();
+        for (int i = 0; i < rows.size(); i++) {
+            Pointer place = Survey.READINGS.child("seals").child(i);
+            Branch row = rows.get(i);
+            Optional<Side> side = requiredWord(row, place, "side", Side::ofCode);
+            Optional<SealType> type = requiredWord(row, place, "type", SealType::ofCode);
+            Optional<SealCondition> condition = type.filter(known -> known == SealType.NONE).isPresent()
+                    ? word(row, place, "condition", SealCondition::ofCode).or(() -> Optional.of(SealCondition.SOUND))
+                    : requiredWord(row, place, "condition", SealCondition::ofCode);
+            Optional<Quantity> length = required(row, place, "length");
+            if (side.isPresent() && type.isPresent() && condition.isPresent() && length.isPresent()) {
+                seals.add(new SealSegment(side.get(), type.get(), condition.get(), below(place, () ->
+                        reading(place.child("length"), length.get(), Dimension.LENGTH, Instrument.TAPE))));
+            }
+        }
+        return seals;
+    }
+
+    private Optional<Quantity> required(Branch row, Pointer place, String key) {
+        Optional<Quantity> quantity = below(place, () -> row.quantity(key));
+        if (quantity.isEmpty()) {
+            unfinished.add(place.child(key).toString());
+        }
+        return quantity;
+    }
+
+    private <T> Optional<T> requiredWord(Branch row, Pointer place, String key, Function<String, Optional<T>> words) {
+        Optional<T> word = word(row, place, key, words);
+        if (word.isEmpty()) {
+            unfinished.add(place.child(key).toString());
+        }
+        return word;
+    }
+
+    private static <T> Optional<T> word(Branch row, Pointer place, String key, Function<String, Optional<T>> words) {
+        return below(place, () -> row.text(key)).map(code -> words.apply(code).orElseThrow(() ->
+                new Refused(Defect.at(place.child(key), "word-unknown", code))));
+    }
+}

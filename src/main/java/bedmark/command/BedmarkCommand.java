@@ -1,0 +1,95 @@
+package bedmark.command;
+
+import bedmark.document.Defect;
+import bedmark.document.Refused;
+import java.nio.file.Path;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.ParameterException;
+
+/** The program's one command and its ways of failing: one sentence on standard error and the right exit code. */
+@Command(name = "bedmark", mixinStandardHelpOptions = true, versionProvider = ProgramVersion.class,
+        description = "Loading-zone surveys of belt conveyors: recorded on a tablet, judged on the spot.",
+        footer = {"", "Without a command the tablet app opens.",
+            "Exit codes: 0 fine, 1 something overloaded, 2 bad use, 3 unreadable input,",
+            "4 something undecided or incomplete."})
+public final class BedmarkCommand implements Callable<Integer> {
+    private final Surroundings surroundings;
+
+    private BedmarkCommand(Surroundings surroundings) {
+        this.surroundings = surroundings;
+    }
+
+    /**
+     * Runs the program.
+     *
+     * @return its exit code
+     */
+    public static int run(Surroundings surroundings, String... arguments) {
+        CommandLine line = new CommandLine(new BedmarkCommand(surroundings))
+                .addSubcommand(new OpenCommand(surroundings))
+                .addSubcommand(new AssessCommand(surroundings))
+                .addSubcommand(new CommandLine(new Group.PackGroup())
+                        .addSubcommand(new PackVerifyCommand(surroundings))
+                        .addSubcommand(new PackMakeCommand(surroundings)))
+                .addSubcommand(new CommandLine(new Group.FormsGroup())
+                        .addSubcommand(new FormsCheckCommand(surroundings)))
+                .addSubcommand(new CommandLine(new Group.StoreGroup())
+                        .addSubcommand(new StoreCheckCommand(surroundings))
+                        .addSubcommand(new StoreRebuildCommand(surroundings)))
+                .setOut(surroundings.out())
+                .setErr(surroundings.err())
+                .setParameterExceptionHandler(BedmarkCommand::badUse)
+                .setExecutionExceptionHandler((failure, failed, parsed) -> failed(surroundings, failure));
+        int code = line.execute(arguments);
+        surroundings.out().flush();
+        surroundings.err().flush();
+        return code;
+    }
+
+    @Override
+    public Integer call() {
+        return OpenCommand.open(surroundings, OpenCommand.ownStore(), Optional.empty());
+    }
+
+    private static int badUse(ParameterException failure, String[] arguments) {
+        CommandLine line = failure.getCommandLine();
+        String first = failure.getMessage() == null ? "" : failure.getMessage().lines().findFirst().orElse("");
+        line.getErr().println("bedmark: " + first + " (see '" + line.getCommandSpec().qualifiedName() + " --help')");
+        return ExitCode.BAD_USE;
+    }
+
+    private static int failed(Surroundings surroundings, Exception failure) {
+        surroundings.err().println("bedmark: " + sentence(surroundings, failure));
+        return ExitCode.UNREADABLE;
+    }
+
+    private static String sentence(Surroundings surroundings, Exception failure) {
+        Defect defect = failure instanceof Refused refused ? refused.defect()
+                : Defect.in("", "program-failed", failure.getClass().getSimpleName());
+        return sentence(surroundings, defect);
+    }
+
+    /** A defect in words; the place of one that lies in a file begins with the file. */
+    static String sentence(Surroundings surroundings, Defect defect) {
+        Object[] arguments = new Object[defect.details().size() + 1];
+        arguments[0] = defect.where().isEmpty() ? "/" : defect.where();
+        for (int i = 0; i < defect.details().size(); i++) {
+            arguments[i + 1] = defect.details().get(i);
+        }
+        return surroundings.words().text("defect." + defect.code(), arguments);
+    }
+
+    /** The same refusal with the file that it is about before its place. */
+    static <T> T in(Path file, Callable<T> reading) throws Exception {
+        try {
+            return reading.call();
+        } catch (Refused e) {
+            Defect defect = e.defect();
+            throw new Refused(new Defect(defect.code(), file + (defect.where().isEmpty() ? "" : " " + defect.where()),
+                    defect.details()), e);
+        }
+    }
+}

@@ -1,0 +1,34 @@
+package bedmark.command;
+
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
+
+/** A command that only holds others: alone it is bad use. */
+abstract class Group implements Callable<Integer> {
+    @Spec
+    private CommandSpec spec;
+
+    @Override
+    public Integer call() {
+        throw new ParameterException(spec.commandLine(),
+                "name one of " + String.join(", ", spec.subcommands().keySet()));
+    }
+
+    /** Packs. */
+    @Command(name = "pack", mixinStandardHelpOptions = true, description = "Makes and verifies packs.")
+    static final class PackGroup extends Group {
+    }
+
+    /** Field forms. */
+    @Command(name = "forms", mixinStandardHelpOptions = true, description = "Checks field forms.")
+    static final class FormsGroup extends Group {
+    }
+
+    /** Stores. */
+    @Command(name = "store", mixinStandardHelpOptions = true, description = "Proves and rebuilds a store.")
+    static final class StoreGroup extends Group {
+    }
+}

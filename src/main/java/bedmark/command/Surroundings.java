@@ -1,0 +1,34 @@
+package bedmark.command;
+
+import bedmark.words.Words;
+import java.io.PrintWriter;
+import java.nio.file.Path;
+import java.time.Clock;
+import java.util.Optional;
+
+/**
+ * What a command finds around it.
+ *
+ * @param out     standard output
+ * @param err     standard error
+ * @param home    the folder that holds {@code field-forms/} and {@code sample-surveys/}, where one is laid out
+ * @param clock   the time
+ * @param words   the words of the commands
+ * @param opening opens the tablet app
+ */
+public record Surroundings(PrintWriter out, PrintWriter err, Optional<Path> home, Clock clock, Words words,
+                           Opening opening) {
+
+    /** Opens the app and returns when it is closed. */
+    @FunctionalInterface
+    public interface Opening {
+        /**
+         * Opens the app.
+         *
+         * @param store the store's folder
+         * @param demo  whether an empty store is filled with the demo plant of that folder
+         * @return whether a window could be opened; without a display it could not
+         */
+        boolean open(Path store, Optional<Path> demo);
+    }
+}

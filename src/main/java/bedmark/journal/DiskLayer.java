@@ -1,0 +1,168 @@
+package bedmark.journal;
+
+import java.io.Closeable;
+import java.io.IOException;
+import java.io.RandomAccessFile;
+import java.nio.ByteBuffer;
+import java.nio.channels.FileChannel;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.nio.file.StandardOpenOption;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.stream.Stream;
+
+/** The real disk. */
+final class DiskLayer implements FileLayer {
+    private static final boolean WINDOWS =
+            System.getProperty("os.name", "").toLowerCase(Locale.ROOT).startsWith("windows");
+
+    @Override
+    public void createFolder(Path folder) throws IOException {
+        if (Files.isDirectory(folder)) {
+            return;
+        }
+        Path parent = folder.toAbsolutePath().getParent();
+        if (parent != null) {
+            createFolder(parent);
+        }
+        Files.createDirectories(folder);
+        if (parent != null) {
+            forceFolder(parent);
+        }
+    }
+
+    @Override
+    public boolean exists(Path file) {
+        return Files.exists(file);
+    }
+
+    @Override
+    public List<Path> list(Path folder) throws IOException {
+        try (Stream<Path> files = Files.list(folder)) {
+            return files.filter(Files::isRegularFile).sorted().toList();
+        }
+    }
+
+    @Override
+    public Input read(Path file) throws IOException {
+        return new DiskInput(file);
+    }
+
+    @Override
+    public Output create(Path file) throws IOException {
+        return new DiskOutput(FileChannel.open(file, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE));
+    }
+
+    @Override
+    public Output append(Path file) throws IOException {
+        FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE);
+        channel.position(channel.size());
+        return new DiskOutput(channel);
+    }
+
+    @Override
+    public void truncate(Path file, long length) throws IOException {
+        try (FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE)) {
+            channel.truncate(length);
+            channel.force(true);
+        }
+    }
+
+    @Override
+    public void move(Path from, Path to) throws IOException {
+        Files.move(from, to, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
+    }
+
+    @Override
+    public void delete(Path file) throws IOException {
+        Files.deleteIfExists(file);
+    }
+
+    @Override
+    public void forceFolder(Path folder) throws IOException {
+        if (WINDOWS) {
+            // A folder cannot be opened there; the file system journals its names itself.
+            return;
+        }
+        try (FileChannel channel = FileChannel.open(folder, StandardOpenOption.READ)) {
+            channel.force(true);
+        }
+    }
+
+    @Override
+    public long usableSpace(Path folder) throws IOException {
+        return Files.getFileStore(folder).getUsableSpace();
+    }
+
+    @Override
+    public boolean writable(Path folder) {
+        return Files.isWritable(folder);
+    }
+
+    @Override
+    public Optional<Closeable> lock(Path file) throws IOException {
+        return ProcessLock.take(file);
+    }
+
+    private record DiskOutput(FileChannel channel) implements Output {
+        @Override
+        public void write(ByteBuffer bytes) throws IOException {
+            while (bytes.hasRemaining()) {
+                channel.write(bytes);
+            }
+        }
+
+        @Override
+        public void force() throws IOException {
+            channel.force(true);
+        }
+
+        @Override
+        public long size() throws IOException {
+            return channel.size();
+        }
+
+        @Override
+        public void close() throws IOException {
+            channel.close();
+        }
+    }
+
+    /** Reads without a channel, since a channel closes for everybody when one reading thread is interrupted. */
+    private static final class DiskInput implements Input {
+        private final RandomAccessFile file;
+
+        DiskInput(Path path) throws IOException {
+            file = new RandomAccessFile(path.toFile(), "r");
+        }
+
+        @Override
+        public synchronized long size() throws IOException {
+            return file.length();
+        }
+
+        @Override
+        public synchronized int read(long position, ByteBuffer into) throws IOException {
+            byte[] bytes = new byte[into.remaining()];
+            file.seek(position);
+            int count = 0;
+            while (count < bytes.length) {
+                int more = file.read(bytes, count, bytes.length - count);
+                if (more < 0) {
+                    break;
+                }
+                count += more;
+            }
+            into.put(bytes, 0, count);
+            return count;
+        }
+
+        @Override
+        public void close() throws IOException {
+            file.close();
+        }
+    }
+}

@@ -1,0 +1,179 @@
+package bedmark.wording;
+
+import bedmark.engine.Assessment;
+import bedmark.engine.Result;
+import bedmark.engine.uncertainty.Estimate;
+import bedmark.engine.verdict.Component;
+import bedmark.engine.verdict.Finding;
+import bedmark.engine.verdict.Level;
+import bedmark.engine.verdict.Remedy;
+import bedmark.engine.verdict.Rule;
+import bedmark.form.FieldForm;
+import bedmark.quantity.Dimension;
+import bedmark.quantity.QuantityFormat;
+import bedmark.quantity.Unit;
+import bedmark.quantity.UnitSystem;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+
+/** Turns an assessment into the sentence, the numbers and the one action that a person needs. */
+public final class Telling {
+    /** Ratios that people say as "so many times"; the others are said in percent. */
+    private static final Set<Rule> TIMES = Set.of(Rule.BED_OVER_DESIGN, Rule.BOARD_TOO_LOW_FOR_LUMPS);
+    /** The depth speaks first where several rules say the same level. */
+    private static final List<Rule> FIRST = List.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD,
+            Rule.FLOW_OVER_CAPACITY, Rule.DRIVE_NEAR_RATING, Rule.SKIRTS_OVER_BUDGET);
+
+    private final Wording wording;
+    private final FieldForm form;
+
+    public Telling(Wording wording, FieldForm form) {
+        this.wording = wording;
+        this.form = form;
+    }
+
+    /** Tells an assessment. */
+    public Told tell(Assessment assessment) {
+        Optional<Finding> leading = leading(assessment);
+        return new Told(sentence(assessment, leading), leading.flatMap(finding -> sure(assessment, finding)),
+                Optional.of(atDesign(assessment)), figures(assessment), action(assessment, leading),
+                assessment.repeat().map(name -> wording.text("verdict.repeat", wording.reading(name, form))));
+    }
+
+    /** The finding that makes the verdict: of the worst level, the one nearest to or farthest over its limit. */
+    public static Optional<Finding> leading(Assessment assessment) {
+        return assessment.findings().stream().min(Comparator
+                .comparing(Finding::level, Comparator.reverseOrder())
+                .thenComparing(finding -> FIRST.contains(finding.rule()) ? FIRST.indexOf(finding.rule())
+                        : FIRST.size()));
+    }
+
+    private String sentence(Assessment assessment, Optional<Finding> leading) {
+        Level level = assessment.level();
+        if (level == Level.INCOMPLETE) {
+            List<String> waiting = assessment.missingRequired();
+            return waiting.isEmpty() ? wording.text("verdict.incomplete")
+                    : wording.text("verdict.incomplete-for", wording.reading(waiting.get(0), form),
+                            wording.format().computed(waiting.size() - 1.0, 0), waiting.size() - 1);
+        }
+        if (leading.isEmpty()) {
+            return wording.text("verdict.level-alone", level(level));
+        }
+        Optional<Finding> lagging = assessment.findings().stream()
+                .filter(finding -> finding.rule() == Rule.BED_BEHIND_BELT && finding.level() != Level.WITHIN
+                        && leading.get().rule() != Rule.BED_BEHIND_BELT).findFirst();
+        return lagging.map(second -> wording.text("verdict.sentence-two", level(level), clause(leading.get()),
+                        clause(second)))
+                .orElseGet(() -> wording.text("verdict.sentence", level(level), clause(leading.get())));
+    }
+
+    /** A level as the head of a sentence. */
+    public String level(Level level) {
+        return wording.text("verdict.level." + level.code());
+    }
+
+    /** What a rule observed, as a clause. */
+    public String clause(Finding finding) {
+        return wording.text("rule." + finding.code() + ".clause", observed(finding, finding.observed()));
+    }
+
+    /** A number of a finding in the way in which its rule is spoken of. */
+    public String observed(Finding finding, double number) {
+        if (finding.rule() == Rule.SEAL_DEFECT) {
+            return wording.format().computed(number, 0);
+        }
+        if (finding.rule() == Rule.BELT_TOO_FAST) {
+            return wording.computed(number, wording.units().unit(Dimension.SPEED));
+        }
+        return TIMES.contains(finding.rule()) ? wording.format().computed(number, 1) : wording.percent(number);
+    }
+
+    private Optional<String> sure(Assessment assessment, Finding leading) {
+        return switch (assessment.level()) {
+            case OVERLOADED -> probability(leading.probabilityOverloaded(), "verdict.sure");
+            case UNDECIDED -> probability(leading.probabilityOverloaded(), "verdict.perhaps-over");
+            case NEAR -> probability(leading.probabilityNear(), "verdict.sure");
+            case WITHIN -> {
+                double over = assessment.findings().stream()
+                        .mapToDouble(finding -> finding.probabilityNear().orElse(0)).max().orElse(0);
+                yield Optional.of(wording.text("verdict.sure", wording.percent(1 - over)));
+            }
+            case INCOMPLETE -> Optional.empty();
+        };
+    }
+
+    private Optional<String> probability(OptionalDouble probability, String key) {
+        return probability.isPresent()
+                ? Optional.of(wording.text(key, wording.percent(probability.getAsDouble()))) : Optional.empty();
+    }
+
+    private String atDesign(Assessment assessment) {
+        return assessment.levelAtDesignFeed()
+                .map(level -> wording.text("verdict.at-design-feed", level(level)))
+                .orElseGet(() -> wording.text("verdict.todays-feed"));
+    }
+
+    private List<Told.Figure> figures(Assessment assessment) {
+        UnitSystem units = wording.units();
+        List<Told.Figure> figures = new ArrayList<>();
+        figure(assessment, Result.SKIRT_DRAG, "figure.drag", units.unit(Dimension.FORCE)).ifPresent(figures::add);
+        boolean atMotor = assessment.get(Result.DRIVE_POWER).isPresent();
+        figure(assessment, atMotor ? Result.DRIVE_POWER : Result.SKIRT_POWER,
+                atMotor ? "figure.power-motor" : "figure.power-belt", units.unit(Dimension.POWER))
+                .ifPresent(figures::add);
+        figure(assessment, Result.DRIVE_SHARE, "figure.share", Unit.PERCENT).ifPresent(figures::add);
+        assessment.leading().ifPresent(component -> figures.add(leads(assessment, component)));
+        return figures;
+    }
+
+    private Optional<Told.Figure> figure(Assessment assessment, Result result, String label, Unit unit) {
+        return assessment.get(result).map(estimate -> new Told.Figure(wording.text(label),
+                wording.format().computed(estimate.value(), unit),
+                "± " + QuantityFormat.with(wording.format().computed(2 * estimate.standardUncertainty(), unit), unit,
+                        wording.symbol(unit))));
+    }
+
+    private Told.Figure leads(Assessment assessment, Component component) {
+        Map<Component, Result> forces = Map.of(Component.BED, Result.MATERIAL_DRAG, Component.SEAL, Result.SEAL_DRAG,
+                Component.LOADING, Result.LOADING_FORCE);
+        double all = forces.values().stream().flatMap(result -> assessment.get(result).stream())
+                .mapToDouble(Estimate::value).filter(force -> force > 0).sum();
+        String share = all > 0 ? assessment.get(forces.get(component))
+                .map(force -> wording.percent(force.value() / all)).orElse("") : "";
+        return new Told.Figure(wording.text("figure.leads"), wording.text("figure.leads." + component.code()), share);
+    }
+
+    private Optional<String> action(Assessment assessment, Optional<Finding> leading) {
+        if (assessment.level() == Level.INCOMPLETE) {
+            return Optional.empty();
+        }
+        Optional<Remedy> best = assessment.remedies().stream()
+                .filter(remedy -> remedy.ranked() && remedy.refusedBecause().isEmpty()
+                        && remedy.savedWh().orElse(0) > 0).findFirst();
+        return best.map(this::remedy).or(() -> leading.filter(finding -> finding.level() != Level.WITHIN)
+                .map(finding -> wording.text("action." + finding.action())));
+    }
+
+    /** A remedy in one sentence: what is changed, the depth that comes of it, what it saves in a year. */
+    public String remedy(Remedy remedy) {
+        Unit small = wording.units().smallLength();
+        String change = remedy.change().isPresent() ? wording.percent(remedy.change().getAsDouble()) : "";
+        Optional<Unit> unit = Unit.ofCode(remedy.unit());
+        if (unit.isPresent() && remedy.change().isPresent()) {
+            Unit shown = unit.get().dimension() == Dimension.LENGTH ? small
+                    : wording.units().unit(unit.get().dimension());
+            change = wording.computed(unit.get().toSi(BigDecimal.valueOf(remedy.change().getAsDouble())),
+                    shown);
+        }
+        String saved = remedy.savedWh().isPresent()
+                ? wording.text("action.saves", wording.text("action.megawatt-hours",
+                        wording.format().computed(remedy.savedWh().getAsDouble() / 1e6, 2))) : "";
+        return wording.text("remedy." + remedy.code(), change, wording.computed(remedy.meanDepth(), small), saved);
+    }
+}

@@ -1,0 +1,115 @@
+package bedmark.wording;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Node;
+import bedmark.document.Pointer;
+import bedmark.document.Refused;
+import bedmark.form.Field;
+import bedmark.form.FieldForm;
+import bedmark.form.Judgement;
+import bedmark.quantity.Quantity;
+import bedmark.quantity.QuantityFormat;
+import bedmark.quantity.TypedNumber;
+import bedmark.quantity.Unit;
+import bedmark.quantity.UnitSystem;
+import bedmark.words.Words;
+import java.util.Optional;
+
+/**
+ * How one person is told things.
+ *
+ * @param words the language, and with it the number format
+ * @param units the unit system of results
+ */
+public record Wording(Words words, UnitSystem units) {
+
+    /** The text of a key (see {@link Words#text}). */
+    public String text(String key, Object... arguments) {
+        return words.text(key, arguments);
+    }
+
+    public QuantityFormat format() {
+        return new QuantityFormat(words.locale());
+    }
+
+    /** The symbol of a unit. */
+    public String symbol(Unit unit) {
+        return text("unit." + unit.key());
+    }
+
+    /** A computed number in a unit, with its symbol. */
+    public String computed(double si, Unit unit) {
+        return QuantityFormat.with(format().computed(si, unit), unit, symbol(unit));
+    }
+
+    /** A quantity as it was entered, with its unit's symbol. */
+    public String entered(Quantity quantity) {
+        return QuantityFormat.with(format().entered(quantity), quantity.unit(), symbol(quantity.unit()));
+    }
+
+    /** A share as a whole percentage, never rounded to a certainty that is none. */
+    public String percent(double share) {
+        String number = share > 0.99 && share < 1 ? "> 99" : share > 0 && share < 0.01 ? "< 1"
+                : format().computed(share * 100, 0);
+        return QuantityFormat.with(number, Unit.PERCENT, symbol(Unit.PERCENT));
+    }
+
+    /** A defect in one sentence. */
+    public String sentence(Defect defect) {
+        Object[] arguments = new Object[defect.details().size() + 1];
+        arguments[0] = defect.where().isEmpty() ? "/" : defect.where();
+        for (int i = 0; i < defect.details().size(); i++) {
+            arguments[i + 1] = defect.details().get(i);
+        }
+        return text("defect." + defect.code(), arguments);
+    }
+
+    /** A judgement in one sentence. */
+    public String sentence(Judgement judgement, Field field) {
+        Object[] arguments = new Object[judgement.details().size() + 1];
+        arguments[0] = field.head().label().in(words.language());
+        for (int i = 0; i < judgement.details().size(); i++) {
+            arguments[i + 1] = shown(judgement.details().get(i));
+        }
+        return text("judgement." + judgement.code(), arguments);
+    }
+
+    /** Why a typing is no number. */
+    public String sentence(TypedNumber.Reason reason) {
+        return text("entry." + reason.code());
+    }
+
+    /** A detail of a judgement for people. */
+    private String shown(Node node) {
+        if (node instanceof Node.Text text) {
+            return text.value();
+        } else if (node instanceof Node.Decimal decimal) {
+            return format().exact(decimal.value());
+        } else if (node instanceof Branch branch) {
+            try {
+                return entered(branch.asQuantity());
+            } catch (Refused e) {
+                return branch.members().keySet().toString();
+            }
+        }
+        return String.valueOf(node);
+    }
+
+    /**
+     * What people call a reading or a registered number.
+     *
+     * @param name a JSON Pointer as the engine names its readings
+     */
+    public String reading(String name, FieldForm form) {
+        Pointer place = Pointer.parse(name);
+        Optional<String> line = place.tokens().stream().filter(token -> token.matches("[0-9]+")).findFirst()
+                .map(index -> format().computed(Double.parseDouble(index) + 1, 0));
+        String label = form.fieldAt(place).map(field -> field.head().label().in(words.language()))
+                .orElseGet(() -> {
+                    String key = "register." + place.last();
+                    return words.has(key) ? text(key) : name;
+                });
+        return line.map(number -> text("register.line", label, number)).orElse(label);
+    }
+}

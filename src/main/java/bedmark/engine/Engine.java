@@ -2,6 +2,7 @@ package bedmark.engine;
 
 import bedmark.engine.uncertainty.ImpossibleReading;
 import java.util.List;
+import java.util.Optional;
 
 /** The way into the engine: pure functions. */
 public final class Engine {
@@ -26,7 +27,13 @@ public final class Engine {
      * @throws ImpossibleReading where a reading cannot be; {@link #check} tells before
      */
     public static List<Assessment> assessConveyor(List<LoadingZone> zones, int unsurveyed, Settings settings) {
-        throw new UnsupportedOperationException();
+        zones.forEach(Engine::check);
+        List<Appraisal> appraisals = zones.stream().map(zone -> new Appraisal(zone, settings)).toList();
+        Optional<ConveyorLoad> today = ConveyorLoad.of(
+                appraisals.stream().map(Appraisal::loadToday).toList(), unsurveyed);
+        Optional<ConveyorLoad> atDesign = ConveyorLoad.of(
+                appraisals.stream().map(Appraisal::loadAtDesign).toList(), unsurveyed);
+        return appraisals.stream().map(appraisal -> appraisal.judge(today, atDesign)).toList();
     }
 
     /**
@@ -35,6 +42,6 @@ public final class Engine {
      * @throws ImpossibleReading with the first reason
      */
     public static void check(LoadingZone zone) {
-        throw new UnsupportedOperationException();
+        new Checks(zone).run();
     }
 }

@@ -10,6 +10,7 @@ import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Reading;
 import java.util.ArrayList;
 import java.util.Collections;
+import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.EnumSet;
 import java.util.List;
@@ -21,7 +22,7 @@ import java.util.Set;
  * Everything that is known of one loading zone, read or registered. Whatever is not known is simply not there.
  *
  * @param data       the single numbers, in SI
- * @param stations   the bed depths along the zone, in order of position
+ * @param stations   the bed depths along the zone; kept in order of position
  * @param seals      the seals of both sides
  * @param speedClass the material's class of belt speed
  * @param marks      what is true of the zone or its material; a mark that is absent is not true
@@ -47,7 +48,7 @@ public record LoadingZone(Map<Datum, Reading> data, List<Station> stations, List
         Map<Datum, Reading> ordered = new EnumMap<>(Datum.class);
         ordered.putAll(data);
         data = Collections.unmodifiableMap(ordered);
-        stations = List.copyOf(stations);
+        stations = stations.stream().sorted(Comparator.comparingDouble(station -> station.position().value())).toList();
         seals = List.copyOf(seals);
         marks = Set.copyOf(marks);
         unfinished = List.copyOf(unfinished);

@@ -3,16 +3,14 @@ package bedmark.engine.drag;
 import java.util.Optional;
 import java.util.stream.Stream;
 
-/** The methods for the drag of the material on the skirtboards. */
+/** The methods for the drag of the material on the skirtboards, each a class of this package. */
 public enum DragMethod {
-    /** The skirtboard friction factor of the table. */
+    /** Tabulated factor. */
     TABULATED("tabulated"),
-    /** Active wall pressure after Rankine. */
+    /** Rankine wall pressure. */
     RANKINE("rankine"),
-    /** The special resistance of ISO 5048 and DIN 22101. */
-    ISO_5048("iso-5048"),
-    /** Fitted from the site's own drive readings. */
-    SITE("site");
+    /** Special resistance of ISO 5048 and DIN 22101. */
+    ISO_5048("iso-5048");
 
     private final String code;
 

@@ -1,0 +1,130 @@
+package bedmark.engine;
+
+import bedmark.engine.bed.DepthMethod;
+import bedmark.engine.bed.DepthPoint;
+import bedmark.engine.bed.Station;
+import bedmark.engine.drag.DragMethod;
+import bedmark.engine.seal.SealRates;
+import bedmark.engine.seal.SealSegment;
+import bedmark.engine.uncertainty.Uncertain;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+
+/** What was taken for granted in the results of one zone. */
+final class Assumptions {
+    /** Above this relative uncertainty of a depth the square is no longer near enough to a straight line. */
+    private static final double COARSE = 0.10;
+
+    private final ZoneFacts zone;
+    private final FeedFacts today;
+
+    Assumptions(FeedFacts today) {
+        zone = today.zone();
+        this.today = today;
+    }
+
+    /**
+     * All of them.
+     *
+     * @param profile  the depths of today
+     * @param atDesign whether the zone could be judged at design throughput
+     */
+    List<Assumption> all(List<DepthPoint> profile, boolean atDesign) {
+        Set<Assumption> all = new LinkedHashSet<>();
+        geometry(all);
+        speed(all);
+        material(all);
+        bed(all, profile);
+        seals(all);
+        flow(all, atDesign);
+        return new ArrayList<>(all);
+    }
+
+    private void geometry(Set<Assumption> all) {
+        fromRegister(all, zone.spacing(), Datum.READ_SPACING, Datum.REGISTER_SPACING);
+        fromRegister(all, zone.height(), Datum.READ_HEIGHT, Datum.REGISTER_HEIGHT);
+        absent(all, "incline-level", Datum.INCLINE, zone.accelerationLength());
+        absent(all, "feed-velocity-zero", Datum.FEED_VELOCITY, today.loadingForce());
+        absent(all, "impact-length-zero", Datum.IMPACT_LENGTH, zone.settlingLength());
+        if (zone.designDepth().value().filter(depth -> depth.value() == 0).isPresent()) {
+            all.add(Assumption.of("design-flow-carried-by-trough"));
+        }
+        if (zone.beltSpeed().isKnown() && !zone.accelerationLength().isKnown()) {
+            all.add(Assumption.of("acceleration-length-endless", Datum.INCLINE.pointer()));
+        }
+    }
+
+    private void speed(Set<Assumption> all) {
+        if (zone.beltSpeed().isKnown() && !zone.number(Datum.BELT_SPEED).isKnown()) {
+            if (zone.number(Datum.TIMED_ELAPSED).isKnown()) {
+                fromRegister(all, zone.beltSpeed(), Datum.TIMED_BELT_LENGTH, Datum.BELT_LENGTH);
+            } else {
+                all.add(Assumption.of("pulley-slip-ignored"));
+            }
+        }
+    }
+
+    private void material(Set<Assumption> all) {
+        if (today.methods().get(DragMethod.RANKINE).isKnown()) {
+            all.add(Assumption.of("repose-for-friction-angle"));
+            absent(all, "wall-friction-one", Datum.WALL_FRICTION, today.methods().get(DragMethod.RANKINE));
+        }
+    }
+
+    private void bed(Set<Assumption> all, List<DepthPoint> profile) {
+        for (int i = 0; i < profile.size(); i++) {
+            Station station = zone.zone().stations().get(i);
+            DepthPoint point = profile.get(i);
+            if (station.method() == DepthMethod.WEAR_LINE) {
+                all.add(Assumption.of("wear-line-is-history", station.raw().name()));
+            }
+            if (today.profile().get().level(i).value() < 0) {
+                all.add(Assumption.of("bed-below-boards", station.raw().name()));
+            }
+            if (point.depth().value() > 0 && point.depth().standardUncertainty() > COARSE * point.depth().value()) {
+                all.add(Assumption.of("first-order-coarse", station.raw().name()));
+            }
+        }
+        if (profile.size() == 1) {
+            all.add(Assumption.of("depth-constant-along-zone"));
+        }
+    }
+
+    private void seals(Set<Assumption> all) {
+        SealRates rates = zone.settings().sealRates();
+        for (SealSegment segment : zone.zone().seals()) {
+            if (rates.isSiteAssumption(segment.type(), segment.condition())) {
+                all.add(Assumption.of("seal-multiplier-site", segment.type().code(), segment.condition().code(),
+                        Double.toString(rates.multiplier(segment.type(), segment.condition()))));
+            }
+        }
+        if (rates.rate() != SealRates.CONVENTION && zone.sealDrag().isKnown()) {
+            all.add(Assumption.of("seal-rate-site", Double.toString(rates.rate())));
+        }
+    }
+
+    private void flow(Set<Assumption> all, boolean atDesign) {
+        boolean read = zone.number(Datum.THROUGHPUT).isKnown();
+        if (!read && today.impliedFlow().isKnown()) {
+            all.add(Assumption.of("bed-at-belt-speed"));
+        }
+        if (!atDesign) {
+            all.add(Assumption.of("verdict-holds-at-todays-feed",
+                    read ? Datum.DESIGN_THROUGHPUT.pointer() : Datum.THROUGHPUT.pointer()));
+        }
+    }
+
+    private void fromRegister(Set<Assumption> all, Deduced<Uncertain> used, Datum read, Datum registered) {
+        if (used.isKnown() && !zone.number(read).isKnown()) {
+            all.add(Assumption.of("register-used", registered.pointer()));
+        }
+    }
+
+    private void absent(Set<Assumption> all, String code, Datum datum, Deduced<Uncertain> user) {
+        if (user.isKnown() && !zone.number(datum).isKnown()) {
+            all.add(Assumption.of(code, datum.pointer()));
+        }
+    }
+}

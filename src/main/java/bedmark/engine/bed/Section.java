@@ -1,0 +1,159 @@
+package bedmark.engine.bed;
+
+import bedmark.engine.uncertainty.Uncertain;
+
+/**
+ * The space between the skirtboards over a trough of three equal rolls, and the bed that lies in it.
+ *
+ * <table><caption>Symbols</caption>
+ * <tr><td>b1</td><td>clear width between the boards (m)</td></tr>
+ * <tr><td>l3</td><td>length of the centre roll (m)</td></tr>
+ * <tr><td>λ</td><td>trough angle (rad), 0 for a flat belt</td></tr>
+ * <tr><td>θ</td><td>surcharge angle (rad)</td></tr>
+ * <tr><td>s</td><td>run of the wing inside the boards, {@code max(0, (b1 − l3)/(2 cos λ))} (m)</td></tr>
+ * <tr><td>h</td><td>depth of the bed against the board, up from the belt at the board (m)</td></tr>
+ * </table>
+ *
+ * <p>Trough: depth under the board line {@code s sin λ}, area {@code (l3 + s cos λ) s sin λ}. Crown: the parabola of
+ * ISO 5048 with the edge slope tan θ: rise {@code b1 tan θ/4}, area {@code b1² tan θ/6} [S5, R]. (DIN 22101 takes /4,
+ * CEMA a circular arc.) Area of the bed: {@code (l3 + s cos λ) s sin λ + b1 h + b1² tan θ/6}.
+ *
+ * <p>Where the surface lies below the board line, the bed is narrower than the boards stand apart: its edge meets the
+ * wing at the run {@code s′ < s}, and the same formulas hold with {@code b′ = l3 + 2 s′ cos λ} and no depth at the
+ * board; within the centre roll it is a crown alone, of width {@code b′ = 4 D/tan θ} for the depth D at the centre [D].
+ *
+ * <p>Depths are kept as <em>levels</em>: {@code (area − area of trough and crown)/b1}. A level is the depth h where the
+ * bed reaches the boards, and negative where it does not; the area is linear in it throughout.
+ */
+public final class Section {
+    private final Uncertain spacing;
+    private final Uncertain centreRoll;
+    private final Uncertain wingRun;
+    private final Uncertain sine;
+    private final Uncertain cosine;
+    private final Uncertain crownSlope;
+    private final Uncertain troughDepth;
+    private final Uncertain carried;
+
+    private Section(Uncertain spacing, Uncertain centreRoll, Uncertain troughAngle, Uncertain surchargeAngle) {
+        this.spacing = spacing;
+        this.centreRoll = centreRoll;
+        sine = troughAngle.sine();
+        cosine = troughAngle.cosine();
+        crownSlope = surchargeAngle.tangent();
+        wingRun = spacing.minus(centreRoll).over(cosine.times(2)).max(Uncertain.ZERO);
+        troughDepth = wingRun.times(sine);
+        carried = troughArea(wingRun).plus(crownArea(spacing));
+    }
+
+    /**
+     * The section over a trough.
+     *
+     * @param spacing        b1 (m), positive
+     * @param centreRoll     l3 (m), positive
+     * @param troughAngle    λ (rad), 0 to under π/2
+     * @param surchargeAngle θ (rad), 0 to under π/2
+     */
+    public static Section troughed(Uncertain spacing, Uncertain centreRoll, Uncertain troughAngle,
+            Uncertain surchargeAngle) {
+        return new Section(spacing, centreRoll, troughAngle, surchargeAngle);
+    }
+
+    /**
+     * The section over a flat belt, all of it over one roll.
+     *
+     * @param spacing        b1 (m), positive
+     * @param surchargeAngle θ (rad), 0 to under π/2
+     */
+    public static Section flat(Uncertain spacing, Uncertain surchargeAngle) {
+        return new Section(spacing, spacing, Uncertain.ZERO, surchargeAngle);
+    }
+
+    /** b1 (m). */
+    public Uncertain spacing() {
+        return spacing;
+    }
+
+    /** s, the run of each wing inside the boards (m). */
+    public Uncertain wingRun() {
+        return wingRun;
+    }
+
+    /** Depth of the trough under the board line (m). */
+    public Uncertain troughDepth() {
+        return troughDepth;
+    }
+
+    /** Rise of the crown between the boards (m). */
+    public Uncertain crownRise() {
+        return spacing.times(crownSlope).over(4);
+    }
+
+    /** Area that trough and crown carry with no depth at the boards (m²). */
+    public Uncertain carried() {
+        return carried;
+    }
+
+    /** Area of the bed at a level (m²). */
+    public Uncertain area(Uncertain level) {
+        return carried.plus(spacing.times(level));
+    }
+
+    /** Level of a bed of that area (m): the inverse of {@link #area}. */
+    public Uncertain level(Uncertain area) {
+        return area.minus(carried).over(spacing);
+    }
+
+    /**
+     * The level after a reading.
+     *
+     * @param raw    the depth at the board, the freeboard or the centre depth (m), not negative
+     * @param method how it was read
+     * @param height of the board over the belt at the board (m)
+     */
+    public Uncertain level(Uncertain raw, DepthMethod method, Uncertain height) {
+        return switch (method) {
+            case AT_BOARD, WEAR_LINE -> raw;
+            case FROM_BOARD_TOP -> {
+                Uncertain depth = height.minus(raw);
+                yield depth.value() >= 0 ? depth : level(areaUnderEdge(Uncertain.ZERO.minus(depth)));
+            }
+            case AT_CENTRE -> {
+                Uncertain depth = raw.minus(troughDepth).minus(crownRise());
+                yield depth.value() >= 0 ? depth : level(areaUnderCentre(raw));
+            }
+        };
+    }
+
+    /** Area of a bed that is narrower than the boards, by its depth D at the belt's centre (m²). */
+    private Uncertain areaUnderCentre(Uncertain centreDepth) {
+        Uncertain run = centreDepth.minus(centreRoll.times(crownSlope).over(4))
+                .over(sine.plus(cosine.times(crownSlope).over(2)));
+        return run.value() >= 0 ? areaToRun(run) : crownOfRise(centreDepth);
+    }
+
+    /** Area of a bed whose edge lies so far (m) under the board line (m²). */
+    private Uncertain areaUnderEdge(Uncertain drop) {
+        if (drop.value() < troughDepth.value()) {
+            return areaToRun(wingRun.minus(drop.over(sine)));
+        }
+        Uncertain width = centreRoll.min(spacing);
+        return crownOfRise(width.times(crownSlope).over(4).minus(drop.minus(troughDepth)));
+    }
+
+    private Uncertain areaToRun(Uncertain run) {
+        return troughArea(run).plus(crownArea(centreRoll.plus(run.times(cosine).times(2))));
+    }
+
+    private Uncertain troughArea(Uncertain run) {
+        return centreRoll.plus(run.times(cosine)).times(run.times(sine));
+    }
+
+    private Uncertain crownArea(Uncertain width) {
+        return width.square().times(crownSlope).over(6);
+    }
+
+    private Uncertain crownOfRise(Uncertain rise) {
+        return rise.value() > 0 ? crownArea(rise.times(4).over(crownSlope)) : Uncertain.ZERO;
+    }
+}

@@ -1,0 +1,44 @@
+package bedmark.engine.flow;
+
+import bedmark.engine.uncertainty.Uncertain;
+import java.util.Optional;
+
+/**
+ * Area that the open belt carries away from the boards, after ISO 5048 for three equal rolls [S5, R].
+ *
+ * <pre>
+ * b  = 0.9 B − 0.05 m  for B ≤ 2 m,  else B − 0.25 m
+ * S1 = [l3 + (b − l3) cos λ]² tan θ/6
+ * S2 = [l3 + (b − l3)/2 · cos λ] · (b − l3)/2 · sin λ
+ * S  = S1 + S2
+ * </pre>
+ *
+ * <p>B belt width, b its usable width, l3 length of the centre roll (m); λ trough angle, θ surcharge angle (rad). On a
+ * flat belt l3 has no part in it; a centre roll wider than the usable width counts as far as the latter.
+ */
+public final class OpenBelt {
+    private OpenBelt() {
+    }
+
+    /** b (m); nothing where the belt is too narrow to carry anything by the standard. */
+    public static Optional<Uncertain> usableWidth(Uncertain beltWidth) {
+        Uncertain usable = beltWidth.value() <= 2 ? beltWidth.times(0.9).minus(0.05) : beltWidth.minus(0.25);
+        return usable.value() > 0 ? Optional.of(usable) : Optional.empty();
+    }
+
+    /**
+     * S (m²).
+     *
+     * @param usableWidth b (m), positive
+     * @param centreRoll  l3 (m)
+     */
+    public static Uncertain area(Uncertain usableWidth, Uncertain centreRoll, Uncertain troughAngle,
+            Uncertain surchargeAngle) {
+        Uncertain centre = centreRoll.min(usableWidth);
+        Uncertain wings = usableWidth.minus(centre);
+        Uncertain cosine = troughAngle.cosine();
+        Uncertain crown = centre.plus(wings.times(cosine)).square().times(surchargeAngle.tangent()).over(6);
+        Uncertain wing = wings.over(2);
+        return crown.plus(centre.plus(wing.times(cosine)).times(wing).times(troughAngle.sine()));
+    }
+}

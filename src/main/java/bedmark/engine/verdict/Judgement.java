@@ -1,0 +1,54 @@
+package bedmark.engine.verdict;
+
+import bedmark.engine.uncertainty.Estimate;
+import bedmark.engine.uncertainty.NormalDistribution;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** Judges what was observed by the limits of its rule. */
+public final class Judgement {
+    private Judgement() {
+    }
+
+    /**
+     * The finding of one rule: overloaded where it is sure enough that the limit of overload is exceeded, undecided
+     * where it may well be, else near or within by the limit of warning.
+     *
+     * @param observed in the unit of the rule
+     * @param limit    in the same unit
+     * @param leading  the reading that brings most of the uncertainty
+     */
+    public static Finding of(Rule rule, Estimate observed, Limit limit, Certainty certainty,
+            Optional<String> leading) {
+        OptionalDouble overNear = probability(rule.sense(), observed, limit.near());
+        OptionalDouble overOverloaded = probability(rule.sense(), observed, limit.overloaded());
+        return new Finding(rule, level(overNear, overOverloaded, certainty), observed.value(),
+                observed.standardUncertainty(), limit.near(), limit.overloaded(), overNear, overOverloaded,
+                limit.source(), limit.assumption(), leading);
+    }
+
+    /** Whether the observed value, taken as certain, is beyond the limit of warning or of overload. */
+    public static boolean isBroken(Rule rule, double observed, Limit limit) {
+        Estimate certain = new Estimate(observed, 0);
+        return probability(rule.sense(), certain, limit.near()).orElse(0) > 0
+                || probability(rule.sense(), certain, limit.overloaded()).orElse(0) > 0;
+    }
+
+    private static Level level(OptionalDouble overNear, OptionalDouble overOverloaded, Certainty certainty) {
+        if (overOverloaded.isPresent() && overOverloaded.getAsDouble() >= certainty.overloaded()) {
+            return Level.OVERLOADED;
+        }
+        if (overOverloaded.isPresent() && overOverloaded.getAsDouble() >= certainty.undecided()) {
+            return Level.UNDECIDED;
+        }
+        return overNear.isPresent() && overNear.getAsDouble() >= certainty.near() ? Level.NEAR : Level.WITHIN;
+    }
+
+    private static OptionalDouble probability(Sense sense, Estimate observed, OptionalDouble limit) {
+        if (limit.isEmpty()) {
+            return limit;
+        }
+        return OptionalDouble.of(sense == Sense.OVER ? NormalDistribution.over(limit.getAsDouble(), observed)
+                : NormalDistribution.under(limit.getAsDouble(), observed));
+    }
+}

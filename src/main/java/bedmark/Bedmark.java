@@ -1,11 +1,25 @@
 package bedmark;
 
+import bedmark.command.BedmarkCommand;
+import bedmark.command.Surroundings;
+import bedmark.words.Words;
+import java.io.PrintWriter;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.time.Clock;
+import java.util.Locale;
+import java.util.Optional;
+
 /** The program: wires its parts by hand and hands over to a command or to the screen. */
 public final class Bedmark {
     private Bedmark() {
     }
 
     public static void main(String... arguments) {
-        throw new UnsupportedOperationException("not wired yet");
+        Optional<Path> home = Optional.ofNullable(System.getProperty("bedmark.home")).map(Path::of);
+        Surroundings surroundings = new Surroundings(new PrintWriter(System.out, true, StandardCharsets.UTF_8),
+                new PrintWriter(System.err, true, StandardCharsets.UTF_8), home, Clock.systemDefaultZone(),
+                new Words(Locale.ENGLISH), (store, demo) -> false);
+        System.exit(BedmarkCommand.run(surroundings, arguments));
     }
 }

@@ -34,14 +34,15 @@ class ArrowsTest {
             Map.entry("form", List.of("quantity", "document")),
             Map.entry("survey", List.of("quantity", "document", "form", "engine")),
             Map.entry("json", List.of("quantity", "document", "form", "engine", "survey")),
+            Map.entry("wording", List.of("quantity", "words", "document", "engine", "form", "survey")),
             Map.entry("journal", List.of("document", "survey", "json")),
             Map.entry("index", List.of("quantity", "document", "engine", "survey", "json", "journal")),
             Map.entry("picture", List.of("quantity", "document", "engine", "survey")),
             Map.entry("pack", List.of("quantity", "document", "survey", "json", "journal")),
             Map.entry("screen", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
-                    "index", "picture", "pack")),
+                    "index", "picture", "pack", "wording")),
             Map.entry("command", List.of("quantity", "words", "document", "engine", "form", "survey", "json",
-                    "journal", "index", "picture", "pack"))));
+                    "journal", "index", "picture", "pack", "wording"))));
 
     @TestFactory
     Stream<DynamicTest> eachPackageSeesOnlyThoseBelowIt() {

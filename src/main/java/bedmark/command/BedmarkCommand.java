@@ -31,14 +31,6 @@ public final class BedmarkCommand implements Callable<Integer> {
         CommandLine line = new CommandLine(new BedmarkCommand(surroundings))
                 .addSubcommand(new OpenCommand(surroundings))
                 .addSubcommand(new AssessCommand(surroundings))
-                .addSubcommand(new CommandLine(new Group.PackGroup())
-                        .addSubcommand(new PackVerifyCommand(surroundings))
-                        .addSubcommand(new PackMakeCommand(surroundings)))
-                .addSubcommand(new CommandLine(new Group.FormsGroup())
-                        .addSubcommand(new FormsCheckCommand(surroundings)))
-                .addSubcommand(new CommandLine(new Group.StoreGroup())
-                        .addSubcommand(new StoreCheckCommand(surroundings))
-                        .addSubcommand(new StoreRebuildCommand(surroundings)))
                 .setOut(surroundings.out())
                 .setErr(surroundings.err())
                 .setParameterExceptionHandler(BedmarkCommand::badUse)
@@ -50,7 +42,7 @@ public final class BedmarkCommand implements Callable<Integer> {
     }
 
     @Override
-    public Integer call() {
+    public Integer call() throws Exception {
         return OpenCommand.open(surroundings, OpenCommand.ownStore(), Optional.empty());
     }
 
@@ -67,19 +59,8 @@ public final class BedmarkCommand implements Callable<Integer> {
     }
 
     private static String sentence(Surroundings surroundings, Exception failure) {
-        Defect defect = failure instanceof Refused refused ? refused.defect()
-                : Defect.in("", "program-failed", failure.getClass().getSimpleName());
-        return sentence(surroundings, defect);
-    }
-
-    /** A defect in words; the place of one that lies in a file begins with the file. */
-    static String sentence(Surroundings surroundings, Defect defect) {
-        Object[] arguments = new Object[defect.details().size() + 1];
-        arguments[0] = defect.where().isEmpty() ? "/" : defect.where();
-        for (int i = 0; i < defect.details().size(); i++) {
-            arguments[i + 1] = defect.details().get(i);
-        }
-        return surroundings.words().text("defect." + defect.code(), arguments);
+        return surroundings.wording().sentence(failure instanceof Refused refused ? refused.defect()
+                : Defect.in("", "program-failed", failure.getClass().getSimpleName()));
     }
 
     /** The same refusal with the file that it is about before its place. */

@@ -27,12 +27,12 @@ final class OpenCommand implements Callable<Integer> {
     }
 
     @Override
-    public Integer call() {
+    public Integer call() throws Exception {
         return open(surroundings, store.orElseGet(OpenCommand::ownStore),
                 demo ? Optional.of(samples(surroundings)) : Optional.empty());
     }
 
-    static int open(Surroundings surroundings, Path store, Optional<Path> demo) {
+    static int open(Surroundings surroundings, Path store, Optional<Path> demo) throws Exception {
         if (surroundings.opening().open(store, demo)) {
             return ExitCode.FINE;
         }

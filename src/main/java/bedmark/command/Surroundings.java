@@ -1,5 +1,7 @@
 package bedmark.command;
 
+import bedmark.quantity.UnitSystem;
+import bedmark.wording.Wording;
 import bedmark.words.Words;
 import java.io.PrintWriter;
 import java.nio.file.Path;
@@ -18,6 +20,11 @@ import java.util.Optional;
  */
 public record Surroundings(PrintWriter out, PrintWriter err, Optional<Path> home, Clock clock, Words words,
                            Opening opening) {
+
+    /** How the person at the terminal is told things. */
+    Wording wording() {
+        return new Wording(words, UnitSystem.METRIC);
+    }
 
     /** Opens the app and returns when it is closed. */
     @FunctionalInterface

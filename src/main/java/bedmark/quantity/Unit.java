@@ -2,6 +2,7 @@ package bedmark.quantity;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
@@ -67,8 +68,21 @@ public enum Unit {
         return code;
     }
 
+    /**
+     * The code as a key of resource bundles: without its brackets, {@code -per-} for the slash and {@code percent}
+     * for its sign, as in {@code ft_i-per-min}.
+     */
+    public String key() {
+        return code.replaceAll("[\\[\\]]", "").replace("/", "-per-").replace("%", "percent");
+    }
+
     public Dimension dimension() {
         return dimension;
+    }
+
+    /** The units of a dimension. */
+    public static List<Unit> of(Dimension dimension) {
+        return Stream.of(values()).filter(unit -> unit.dimension == dimension).toList();
     }
 
     /** A number of this unit in the SI unit of its dimension, correctly rounded once. */

@@ -4,7 +4,7 @@ import static bedmark.command.BedmarkCommand.in;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
-import bedmark.json.JsonReader;
+import bedmark.json.BundleReader;
 import bedmark.survey.Bundle;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -58,6 +58,6 @@ final class BundleSource {
 
     private static Named one(Path file) throws Exception {
         byte[] bytes = InputFile.read(file);
-        return in(file, () -> new Named(file, new Bundle(JsonReader.read(bytes).root())));
+        return in(file, () -> new Named(file, BundleReader.read(bytes)));
     }
 }

@@ -68,7 +68,7 @@ public final class Workplace implements AutoCloseable {
     }
 
     /** Takes a register in. Runs beside the screen. */
-    void adopt(Act register) {
+    public void adopt(Act register) {
         store.append(preferences.get().person(), register);
         Optional<Site> read = readSite();
         screen.execute(() -> site.set(read));

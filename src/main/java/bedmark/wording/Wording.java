@@ -5,6 +5,7 @@ import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
+import bedmark.engine.Assumption;
 import bedmark.form.Field;
 import bedmark.form.FieldForm;
 import bedmark.form.Judgement;
@@ -94,6 +95,23 @@ public record Wording(Words words, UnitSystem units) {
             }
         }
         return String.valueOf(node);
+    }
+
+    /** Something that was taken for granted, in one sentence. */
+    public String assumption(Assumption assumption, FieldForm form) {
+        Object[] arguments = assumption.arguments().stream()
+                .map(argument -> argument.startsWith("/") ? reading(argument, form) : spoken(argument)).toArray();
+        return text("assumption." + assumption.code(), arguments);
+    }
+
+    /** An argument of the engine for people: a number in the locale's form, a code in words. */
+    private String spoken(String argument) {
+        try {
+            return format().computed(Double.parseDouble(argument), 3);
+        } catch (NumberFormatException e) {
+            String key = "assumption.word." + argument;
+            return words.has(key) ? text(key) : argument;
+        }
     }
 
     /**

@@ -168,6 +168,23 @@ public final class RoundModel {
         });
     }
 
+    /**
+     * Opens a correction of a completed survey.
+     *
+     * @param then gets the row with the new revision
+     */
+    public void correct(UUID completed, String why, Consumer<RoundRow> then) {
+        Survey old = workplace.store().history(completed).orElseThrow().survey();
+        UUID id = UUID.randomUUID();
+        Branch document = old.document().with("id", id.toString()).with("revision", Node.number(old.revision() + 1L))
+                .with("supersedes", completed.toString()).with("revisionReason", why)
+                .without("completedAt").without("signedOffBy");
+        workplace.scribe().save(person(), new Act.RevisionOpened(id, completed, why, document), entry -> {
+            reload();
+            rows.get().stream().filter(row -> row.transfer().equals(old.transfer())).findFirst().ifPresent(then);
+        });
+    }
+
     private void answer(UUID survey, String key, String text) {
         workplace.scribe().save(person(), new Act.AnswerSet(survey, Pointer.of(key), Optional.of(Node.text(text))),
                 entry -> { });

@@ -119,7 +119,7 @@ final class SchemaCheck {
         return pointer;
     }
 
-    /** The document for the validator; an explicit nothing in an object counts as an absent key, as it does elsewhere. */
+    /** The document for the validator; an explicit nothing in an object is an absent key, as it is elsewhere. */
     private static JsonNode tree(Node node) {
         if (node instanceof Branch branch) {
             ObjectNode object = NODES.objectNode();

@@ -56,7 +56,7 @@ class FormsCheckerTest {
 
     @ParameterizedTest
     @CsvSource(delimiter = '|', quoteCharacter = '~', value = {
-        "~\"kind\": \"flag\"~ | ~\"kind\": \"slider\"~ | 87 | isolated | word-wrong",
+        "~\"kind\": \"flag\"~ | ~\"kind\": \"slider\"~ | 88 | isolated | word-wrong",
         "~\"group\": \"readings\",\n          \"label\": {\"en\": \"Moisture\"~ "
             + "| ~\"label\": {\"en\": \"Moisture\"~ | 12 | moisture | key-absent",
         "~\"version\": 1,\n  \"title\"~ | ~\"version\": 0,\n  \"title\"~ | 5 | version | number-too-small",
@@ -65,7 +65,7 @@ class FormsCheckerTest {
         "~\"possible\": {\"from\": 0}~ | ~\"possible\": {\"from\": 0, \"above\": 0}~ | 31 | drips "
             + "| range-with-two-starts",
         "~\"key\": \"second\"~ | ~\"key\": \"first\"~ | 36 | first | section-twice",
-        "~\"key\": \"isolated\"~ | ~\"key\": \"dust\"~ | 86 | dust | field-twice",
+        "~\"key\": \"isolated\"~ | ~\"key\": \"dust\"~ | 87 | dust | field-twice",
         "~\"Dust\", \"es\": \"Polvo\"~ | ~\"Dust\"~ | 44 | dust | language-missing",
         "~\"Look.\", \"es\": \"Mire.\"~ | ~\"Look.\"~ | 38 | second | language-missing",
         "~\"Dense\", \"es\": \"Denso\"~ | ~\"Dense\"~ | 47 | dust | language-missing",
@@ -85,11 +85,14 @@ class FormsCheckerTest {
         "~\"isOneOf\": [1, 2]~ | ~\"isOneOf\": [1, \"2\"]~ | 56 | dustAt | condition-value-wrong",
         "~{\"code\": \"dense\"~ | ~{\"code\": \"none\"~ | 47 | dust | choice-twice",
         "~{\"code\": \"torn\"~ | ~{\"code\": \"ripped\"~ | 75 | seals | choice-absent",
-        "~\"key\": \"moisture\"~ | ~\"key\": \"throughput\"~ | 18 | throughput | field-kind-wrong",
-        "~\"key\": \"isolated\"~ | ~\"key\": \"skirtHeight\"~ | 87 | skirtHeight | field-kind-wrong",
+        "~\"key\": \"moisture\"~ | ~\"key\": \"throughput\"~ | 18 | throughput | dimension-wrong",
+        "~\"key\": \"isolated\"~ | ~\"key\": \"skirtHeight\"~ | 88 | skirtHeight | field-kind-wrong",
         "~\"key\": \"seals\"~ | ~\"key\": \"gaskets\"~ | 59 | gaskets | field-key-wrong",
         "~\"dimension\": \"length\"~ | ~\"dimension\": \"time\"~ | 83 | seals | dimension-wrong",
-        "~\"title\": {\"en\": \"Sound\", \"es\": \"Sano\"}~ | ~\"title\": {\"es\": \"Sano\"}~ | 6 | title | key-absent"})
+        "~\"above\": {\"value\": 0~ | ~\"from\": {\"value\": 0~ | 84 | seals | possible-holds-zero",
+        "~\"above\": {\"value\": 0~ | ~\"to\": {\"value\": 9~ | 84 | seals | possible-below-zero",
+        "~\"title\": {\"en\": \"Sound\", \"es\": \"Sano\"}~ | ~\"title\": {\"es\": \"Sano\"}~ "
+            + "| 6 | title | key-absent"})
     void everyFaultIsNamedWithFileLineAndKey(String sought, String instead, int line, String key, String code)
             throws IOException {
         String text = sound();

@@ -14,6 +14,7 @@ import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
 
@@ -96,11 +97,6 @@ final class FormCheck {
             }
             if (!reading.kind().equals(kind)) {
                 found.add(Defect.at(where.child("kind"), "field-kind-wrong", key, reading.kind()));
-            } else if (reading.dimension().isPresent()) {
-                String wanted = reading.dimension().map(Dimension::code).orElseThrow();
-                if (!word(field.branch("measure").orElseThrow(), "dimension").equals(wanted)) {
-                    found.add(Defect.at(where.child("measure").child("dimension"), "field-kind-wrong", key, wanted));
-                }
             }
         });
         for (ReadingKey reading : ReadingKey.values()) {
@@ -142,9 +138,10 @@ final class FormCheck {
     private void parts(Branch field, Pointer where) {
         FieldShape shape = FieldShape.of(word(field, "kind"));
         MeasureCheck measures = new MeasureCheck(found);
-        shape.measures().forEach((part, wanted) ->
-                measures.measure((Branch) field.at(part).orElseThrow(), below(where, part), wanted));
-        shape.counts().forEach(part -> measures.count((Branch) field.at(part).orElseThrow(), below(where, part)));
+        shape.measures().forEach((part, wanted) -> measures.measure((Branch) field.at(part).orElseThrow(),
+                below(where, part), wanted.equals(FieldShape.Wanted.ANY) ? wanted(field) : wanted));
+        shape.counts().forEach((part, floor) ->
+                measures.count((Branch) field.at(part).orElseThrow(), below(where, part), floor));
         shape.texts().forEach(part -> texts(field, part, where));
         for (Pointer part : shape.choices()) {
             List<Branch> choices = field.branches(part.last());
@@ -155,6 +152,14 @@ final class FormCheck {
                 texts(choices.get(i), Pointer.of("label"), place);
             }
         }
+    }
+
+    /** What the measure of a quantity has to be: free, unless its key has a meaning outside the form. */
+    private static FieldShape.Wanted wanted(Branch field) {
+        Optional<ReadingKey> reading = ReadingKey.ofKey(word(field, "key"));
+        return reading.flatMap(ReadingKey::dimension).map(dimension -> FieldShape.Wanted.of(dimension,
+                dimension == Dimension.LENGTH ? FieldShape.Floor.ABOVE_ZERO : FieldShape.Floor.AT_ZERO))
+                .orElse(FieldShape.Wanted.ANY);
     }
 
     private void texts(Branch around, Pointer part, Pointer where) {

@@ -5,9 +5,11 @@ import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.form.Range;
+import bedmark.json.FieldShape.Floor;
 import bedmark.quantity.Dimension;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
+import java.math.BigDecimal;
 import java.util.Comparator;
 import java.util.HashSet;
 import java.util.List;
@@ -23,13 +25,13 @@ final class MeasureCheck {
         this.found = found;
     }
 
-    /** Checks a measure; {@code wanted} are the dimensions that it may have. */
-    void measure(Branch measure, Pointer where, List<Dimension> wanted) {
+    /** Checks a measure. */
+    void measure(Branch measure, Pointer where, FieldShape.Wanted wanted) {
         Dimension dimension = measure.text("dimension").flatMap(Dimension::ofCode).orElseThrow();
         int before = found.size();
-        if (!wanted.contains(dimension)) {
+        if (!wanted.dimensions().contains(dimension)) {
             found.add(Defect.at(where.child("dimension"), "dimension-wrong", dimension.code(),
-                    wanted.get(0).code()));
+                    wanted.dimensions().get(0).code()));
         }
         Set<String> offered = new HashSet<>();
         List<Branch> units = measure.branches("units");
@@ -56,11 +58,25 @@ final class MeasureCheck {
         }
         if (found.size() == before) {
             ranges(measure, where, FormReader::quantity, Quantity.BY_SIZE);
+            floor(FormReader.range(measure, "possible", end -> FormReader.quantity(end).value()), where,
+                    wanted.floor());
         }
     }
 
-    void count(Branch count, Pointer where) {
+    /** Checks a plain number. */
+    void count(Branch count, Pointer where, Floor floor) {
         ranges(count, where, FormReader::number, Comparator.naturalOrder());
+        floor(FormReader.range(count, "possible", FormReader::number), where, floor);
+    }
+
+    /** All units begin at the same zero. */
+    private void floor(Range<BigDecimal> possible, Pointer where, Floor floor) {
+        int low = possible.low().map(BigDecimal::signum).orElse(-1);
+        if (floor != Floor.ANYWHERE && low < 0) {
+            found.add(Defect.at(where.child("possible"), "possible-below-zero"));
+        } else if (floor == Floor.ABOVE_ZERO && low == 0 && !possible.excluded()) {
+            found.add(Defect.at(where.child("possible"), "possible-holds-zero"));
+        }
     }
 
     private void unit(String code, Dimension dimension, Pointer where) {

@@ -26,6 +26,7 @@ import java.util.Map;
 
 /** Checks documents against a published schema, which is compiled once. Nothing is fetched from anywhere. */
 final class SchemaCheck {
+    private static final int LONGEST_SHOWN = 60;
     private static final JsonNodeFactory NODES = JsonNodeFactory.instance;
     private static final SchemaRegistry REGISTRY = SchemaRegistry.withDefaultDialect(
             SpecificationVersion.DRAFT_2020_12, builder -> builder.schemaRegistryConfig(
@@ -62,28 +63,35 @@ final class SchemaCheck {
 
     private static Defect defect(Error error) {
         Pointer where = pointer(error.getInstanceLocation());
-        JsonNode met = error.getInstanceNode();
+        String met = oneLine(error.getInstanceNode().asText());
         JsonNode asked = error.getSchemaNode();
         String last = where.isRoot() ? "" : where.last();
         return switch (error.getKeyword()) {
             case "required" -> Defect.at(where, "key-absent", error.getProperty());
             case "type" -> Defect.at(where, "kind-wrong", kind(asked));
-            case "const" -> Defect.at(where, "word-wrong", met.asText(), asked.asText());
-            case "enum" -> Defect.at(where, last.equals("unit") ? "unit-wrong" : "word-wrong", met.asText(),
+            case "const" -> Defect.at(where, "word-wrong", met, asked.asText());
+            case "enum" -> Defect.at(where, last.equals("unit") ? "unit-wrong" : "word-wrong", met,
                     words(asked));
             case "minimum" -> asked.decimalValue().signum() == 0
-                    ? Defect.at(where, "number-negative", met.asText())
-                    : Defect.at(where, "number-too-small", met.asText(), asked.asText());
-            case "exclusiveMinimum" -> Defect.at(where, "number-not-positive", met.asText());
-            case "maximum" -> Defect.at(where, "number-too-large", met.asText(), asked.asText());
+                    ? Defect.at(where, "number-negative", met)
+                    : Defect.at(where, "number-too-small", met, asked.asText());
+            case "exclusiveMinimum" -> Defect.at(where, "number-not-positive", met);
+            case "maximum" -> Defect.at(where, "number-too-large", met, asked.asText());
             case "format" -> Defect.at(where, asked.asText().equals("uuid") ? "uuid-wrong" : "time-wrong",
-                    met.asText());
-            case "minLength", "minItems" -> Defect.at(where, "empty");
-            case "pattern" -> Defect.at(where, "text-wrong", met.asText(), asked.asText());
+                    met);
+            case "minLength", "minItems" -> Defect.at(where, "value-empty");
+            case "pattern" -> error.getSchemaLocation().toString().contains("/moment/")
+                    ? Defect.at(where, "time-wrong", met)
+                    : Defect.at(where, "text-wrong", met, asked.asText());
             case "not" -> Defect.at(where, "range-with-two-starts");
             case "oneOf" -> Defect.at(where, "condition-wrong");
             default -> throw new IllegalStateException("a schema keyword without a defect: " + error.getKeyword());
         };
+    }
+
+    private static String oneLine(String text) {
+        String line = text.lines().findFirst().orElse("");
+        return line.length() > LONGEST_SHOWN ? line.substring(0, LONGEST_SHOWN) + "…" : line;
     }
 
     private static String kind(JsonNode asked) {
@@ -111,7 +119,7 @@ final class SchemaCheck {
         return pointer;
     }
 
-    /** The document for the validator; an explicit nothing in an object counts as an absent key, as it does elsewhere. */
+    /** The document for the validator; an explicit nothing in an object is an absent key, as it is elsewhere. */
     private static JsonNode tree(Node node) {
         if (node instanceof Branch branch) {
             ObjectNode object = NODES.objectNode();

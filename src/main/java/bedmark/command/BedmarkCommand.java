@@ -3,7 +3,6 @@ package bedmark.command;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
 import java.nio.file.Path;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -51,7 +50,7 @@ public final class BedmarkCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
-        return OpenCommand.open(surroundings, OpenCommand.ownStore(), Optional.empty());
+        return OpenCommand.open(surroundings, OpenCommand.ownStore(), false);
     }
 
     private static int badUse(ParameterException failure, String[] arguments) {

@@ -89,6 +89,22 @@ public final class Shell implements Navigator {
         screen.shown();
     }
 
+    /** Loads the demo plant where the store has none. */
+    public void loadDemo() {
+        StartModel model = new StartModel(workplace);
+        if (model.canLoadDemo()) {
+            show(() -> new StartView(workplace, model, this));
+            model.loadDemo();
+        }
+    }
+
+    /** Something failed on the screen: what was typed is saved, and the person is told where they stand. */
+    public void failed(Throwable failure) {
+        screen.left();
+        workplace.report(failure);
+        toStart();
+    }
+
     /** Saves what is typed and lets go of the screen. */
     public void close() {
         screen.left();

@@ -127,6 +127,11 @@ public final class Workplace implements AutoCloseable {
                 new Refused(Defect.in("", "register-absent")));
     }
 
+    /** Shows a failure of the program itself in the head of the screen, in words. */
+    void report(Throwable failure) {
+        scribe.report(Defect.in("", "screen-failed", failure.getClass().getSimpleName()));
+    }
+
     /** Runs work that takes time beside the screen, one after the other. */
     public Executor longWork() {
         return longWork;

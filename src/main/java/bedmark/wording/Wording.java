@@ -63,7 +63,8 @@ public record Wording(Words words, UnitSystem units) {
         for (int i = 0; i < defect.details().size(); i++) {
             arguments[i + 1] = defect.details().get(i);
         }
-        return text("defect." + defect.code(), arguments);
+        // What the input brought along may hold line ends; a refusal is one line.
+        return text("defect." + defect.code(), arguments).replaceAll("\\R", " ");
     }
 
     /** A judgement in one sentence. */

@@ -30,14 +30,15 @@ public final class Theme {
         }
         scene.getRoot().pseudoClassStateChanged(NIGHT, light == Light.NIGHT);
         scene.getRoot().pseudoClassStateChanged(GLOVED, density.hand() == Hand.GLOVED);
-        List<String> sheets = List.of(resource("tokens.css").toExternalForm(), sheet(density));
+        List<String> sheets = List.of(resource("tokens.css").toExternalForm(), sheet("theme.css", density),
+                sheet("screens.css", density));
         if (!scene.getStylesheets().equals(sheets)) {
             scene.getStylesheets().setAll(sheets);
         }
     }
 
-    private static String sheet(Density density) {
-        try (InputStream in = resource("theme.css").openStream()) {
+    private static String sheet(String name, Density density) {
+        try (InputStream in = resource(name).openStream()) {
             String text = density.transcribe(new String(in.readAllBytes(), StandardCharsets.UTF_8));
             return "data:text/css;charset=UTF-8;base64,"
                     + Base64.getEncoder().encodeToString(text.getBytes(StandardCharsets.UTF_8));

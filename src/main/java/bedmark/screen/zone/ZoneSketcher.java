@@ -140,8 +140,8 @@ final class ZoneSketcher {
                 speed.isPresent() ? wording.text("screen.picture.belt",
                         wording.computed(speed.getAsDouble(), wording.units().unit(Dimension.SPEED)))
                         : wording.text("screen.picture.belt-unknown"),
-                height.isPresent() ? wording.text("screen.picture.board-top", small(height.getAsDouble()))
-                        : wording.text("screen.picture.board-unknown"),
+                height.isPresent() ? small(height.getAsDouble()) : "",
+                wording.text(height.isPresent() ? "screen.picture.board-top" : "screen.picture.board-unknown"),
                 length.isPresent() ? wording.computed(length.getAsDouble(), metres)
                         : wording.text("screen.picture.length-unknown"),
                 allowed.map(limit -> small(limit.overloaded().orElseThrow())).orElse(""),

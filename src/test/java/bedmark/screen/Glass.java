@@ -69,18 +69,27 @@ public final class Glass {
                                double height, double scale) throws Exception {
         on(() -> {
             Scene scene = show(root.get(), light, density, width, height);
-            scene.getRoot().layout();
-            SnapshotParameters parameters = new SnapshotParameters();
-            parameters.setTransform(Transform.scale(scale, scale));
-            parameters.setViewport(new Rectangle2D(0, 0, width * scale, height * scale));
-            parameters.setFill(Color.MAGENTA);
-            write(name, scene.getRoot().snapshot(parameters, null));
+            write(PICTURES.resolve(name + ".png"), scene, scale);
             scene.getWindow().hide();
             return name;
         });
     }
 
-    private static void write(String name, WritableImage image) throws IOException {
+    /** Writes what a scene shows into a file. */
+    static void write(Path file, Scene scene) throws IOException {
+        write(file, scene, 1);
+    }
+
+    private static void write(Path file, Scene scene, double scale) throws IOException {
+        scene.getRoot().layout();
+        SnapshotParameters parameters = new SnapshotParameters();
+        parameters.setTransform(Transform.scale(scale, scale));
+        parameters.setViewport(new Rectangle2D(0, 0, scene.getWidth() * scale, scene.getHeight() * scale));
+        parameters.setFill(Color.MAGENTA);
+        write(file, scene.getRoot().snapshot(parameters, null));
+    }
+
+    private static void write(Path file, WritableImage image) throws IOException {
         int width = (int) image.getWidth();
         int height = (int) image.getHeight();
         PixelReader pixels = image.getPixelReader();
@@ -90,7 +99,7 @@ public final class Glass {
                 copy.setRGB(x, y, pixels.getArgb(x, y));
             }
         }
-        Files.createDirectories(PICTURES);
-        ImageIO.write(copy, "png", PICTURES.resolve(name + ".png").toFile());
+        Files.createDirectories(file.toAbsolutePath().getParent());
+        ImageIO.write(copy, "png", file.toFile());
     }
 }

@@ -53,17 +53,17 @@ final class Database implements AutoCloseable {
      * @throws Refused {@code store-locked} where another program has it open
      */
     static Database open(Path folder) {
-        return connect(FILE + path(folder) + SETTINGS);
+        return connect(FILE + path(folder) + SETTINGS, folder);
     }
 
     /** Opens the database of a folder without writing a byte. */
     static Database openToRead(Path folder) {
-        return connect(FILE + path(folder) + SETTINGS + READ_ONLY);
+        return connect(FILE + path(folder) + SETTINGS + READ_ONLY, folder);
     }
 
     /** An empty database that ends with the program, for when the disk takes none. */
     static Database inMemory() {
-        return connect(MEMORY + SETTINGS);
+        return connect(MEMORY + SETTINGS, Path.of(""));
     }
 
     /**
@@ -83,7 +83,7 @@ final class Database implements AutoCloseable {
         return path;
     }
 
-    private static Database connect(String url) {
+    private static Database connect(String url, Path folder) {
         Properties person = new Properties();
         person.setProperty("user", "");
         person.setProperty("password", "");
@@ -93,7 +93,7 @@ final class Database implements AutoCloseable {
             return new Database(connection);
         } catch (SQLException e) {
             if (e.getErrorCode() == ErrorCode.DATABASE_ALREADY_OPEN_1) {
-                throw new Refused(Defect.in("", "store-locked"), e);
+                throw new Refused(Defect.in(folder.toString(), "store-locked"), e);
             }
             throw new IndexBroken(e);
         } catch (RuntimeException | OutOfMemoryError | StackOverflowError e) {

@@ -80,37 +80,39 @@ final class Mend {
         }
         Found.Bad torn = tail.get();
         try {
-            if (last.header().isEmpty() && last.first().isEmpty()) {
-                Path kept = keptAs(0);
-                files.move(last.path(), kept);
-                files.forceFolder(folder);
-                name(torn, kept);
-            } else {
-                Path kept = keptAs(torn.offset());
-                copy(torn, kept);
-                files.truncate(last.path(), torn.offset());
-                name(torn, kept);
-            }
+            Path kept = keptAs(torn.offset());
+            copy(torn, kept);
+            files.truncate(last.path(), torn.offset());
+            name(torn, kept);
         } catch (IOException e) {
             damaged = true;
             name(torn, last.path());
         }
     }
 
+    /** Puts the whole file aside. */
+    void putAside() throws IOException {
+        Path kept = keptAs(0);
+        files.move(last.path(), kept);
+        files.forceFolder(folder);
+        name(new Found.Bad(0, last.size()), kept);
+    }
+
     /**
      * Opens the segment for writing, or a new one in its place.
      *
      * @param number the number of a new segment
+     * @param newest whether no later segment was ever begun; otherwise this one is not written on
      * @return nothing where the next entry begins a new segment
      */
-    Optional<SegmentWriter> writer(int number) {
+    Optional<SegmentWriter> writer(int number, boolean newest) {
         Optional<SegmentHeader> header = last.header();
         if (sealed || damaged || header.isEmpty()) {
             return Optional.empty();
         }
         try {
             if (unproven.isEmpty()) {
-                return Optional.of(SegmentWriter.goOn(files, SegmentFile.look(files, last.path(), last.number())));
+                return !newest ? Optional.empty() : Optional.of(SegmentWriter.goOn(files, SegmentFile.look(files, last.path(), last.number())));
             }
             Frame first = unproven.get(0);
             return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(SegmentHeader.Follows.ABANDONED,

@@ -61,11 +61,12 @@ final class Recovery {
     /** Makes the end of the journal fit to be written on; the mark, where the entry under it is sound. */
     private Optional<Mark> mend() throws IOException {
         list();
+        boolean dropped = dropUnbegun();
         Optional<Mark> sound = Optional.empty();
         if (!SegmentFile.ours(segments).isEmpty()) {
             Optional<Mark> known = mark.filter(one -> one.journal().equals(journal));
-            sound = known.filter(this::verifies);
-            mend(known, sound);
+            sound = known.isPresent() && verifies(known.get()) ? known : Optional.empty();
+            mend(known, sound, !dropped);
         }
         if (SegmentFile.ours(segments).isEmpty()) {
             mark.ifPresent(lost -> found.add(Defect.in(folder.getFileName().toString(), "journal-missing",
@@ -77,7 +78,7 @@ final class Recovery {
         return sound;
     }
 
-    private void mend(Optional<Mark> known, Optional<Mark> sound) throws IOException {
+    private void mend(Optional<Mark> known, Optional<Mark> sound, boolean newest) throws IOException {
         List<SegmentFile> ours = SegmentFile.ours(segments);
         Mend mend = new Mend(files, folder, ours.get(ours.size() - 1), sound, found).look();
         Optional<Mark> lost = known.filter(one -> sound.isEmpty() && one.sequence() > mend.sequence());
@@ -87,9 +88,25 @@ final class Recovery {
             writer = beginAfter(lost.get());
         } else {
             mend.cutTail();
-            writer = mend.writer(nextNumber());
+            writer = mend.writer(nextNumber(), newest);
         }
         list();
+    }
+
+    /** Puts segments aside that were begun and never came to hold anything. */
+    private boolean dropUnbegun() throws IOException {
+        boolean dropped = false;
+        List<SegmentFile> ours = SegmentFile.ours(segments);
+        for (int i = ours.size() - 1; i >= 0 && ours.get(i).unbegun(); i--) {
+            if (ours.get(i).size() == 0) {
+                files.delete(ours.get(i).path());
+            } else {
+                new Mend(files, folder, ours.get(i), Optional.empty(), found).putAside();
+            }
+            dropped = true;
+        }
+        list();
+        return dropped;
     }
 
     private Optional<SegmentWriter> beginAfter(Mark lost) {
@@ -103,7 +120,7 @@ final class Recovery {
     }
 
     /** Whether the entry under a mark is there as it was. */
-    private boolean verifies(Mark one) {
+    private boolean verifies(Mark one) throws IOException {
         Place place = one.place();
         List<SegmentFile> ours = SegmentFile.ours(segments);
         Optional<SegmentFile> holder =
@@ -119,8 +136,6 @@ final class Recovery {
             bytes.flip();
             return Digest.of(bytes).equals(place.hash())
                     && Frame.decode(bytes).filter(frame -> frame.sequence() == one.sequence()).isPresent();
-        } catch (IOException e) {
-            return false;
         }
     }
 

@@ -89,6 +89,11 @@ record SegmentFile(Path path, int number, long size, Optional<SegmentHeader> hea
         return new SegmentFile(path, number, Math.min(size, length), header, first);
     }
 
+    /** Whether its making was not finished: neither the header nor any entry is sound. */
+    boolean unbegun() {
+        return header.isEmpty() && first.isEmpty();
+    }
+
     /** Where its frames begin; with a damaged header that place is read like any other. */
     long start() {
         return header.isPresent() ? SegmentHeader.LENGTH : 0;

@@ -16,6 +16,9 @@ import java.util.stream.Stream;
 
 /** What follows from a zone's readings whatever the feed: geometry, speed, seals, capacity, design. */
 final class ZoneFacts {
+    /** The place of the bed depths. */
+    static final String DEPTHS = "/readings/bedDepths";
+
     private static final double SHARE_OF_WIDTH = 0.10;
 
     private final Sources sources;
@@ -176,7 +179,7 @@ final class ZoneFacts {
 
     private Deduced<Profile> findProfile() {
         Deduced<List<Station>> stations = zone().stations().isEmpty()
-                ? Deduced.waitingFor("/readings/bedDepths") : Deduced.known(zone().stations());
+                ? Deduced.waitingFor(DEPTHS) : Deduced.known(zone().stations());
         return Deduced.from(() -> new Profile(length().get(),
                 stations.get().stream().map(station -> sources.take(station.position())).toList(),
                 stations.get().stream().map(this::level).toList()),

@@ -42,7 +42,7 @@ final class Remedies {
 
     /** The remedies that the readings support: first those that may be ranked, the greatest saving ahead. */
     List<Remedy> all() {
-        if (!now.skirtPower().isKnown()) {
+        if (!now.skirtPower().isKnown() || !zone.section().isKnown()) {
             return List.of();
         }
         return Stream.of(freeBed(), lowerFeed(), widerBoards(), shorterZone(),

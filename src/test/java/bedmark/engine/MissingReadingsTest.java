@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.engine.bed.DepthMethod;
 import bedmark.engine.drag.DragMethod;
 import bedmark.engine.seal.SealCondition;
+import bedmark.engine.seal.SealRates;
 import bedmark.engine.seal.SealType;
 import bedmark.engine.seal.Side;
 import bedmark.engine.verdict.Level;
@@ -64,6 +65,23 @@ class MissingReadingsTest {
         assertFalse(assessment.results().containsKey(Result.SEAL_DRAG));
         assertFalse(assessment.results().containsKey(Result.SKIRT_POWER));
         assertTrue(assessment.results().containsKey(Result.MATERIAL_DRAG));
+    }
+
+    @Test
+    void whatNeedsNoSectionIsComputedWithoutIt() {
+        LoadingZone bare = ZONE.without(Datum.SURCHARGE_ANGLE).without(Datum.CENTRE_ROLL).without(Datum.READ_HEIGHT)
+                .without(Datum.REGISTER_HEIGHT);
+        Assessment assessment = Engine.assess(bare, Settings.standard());
+        assertEquals(Engine.assess(ZONE, Settings.standard()).get(Result.SKIRT_POWER),
+                assessment.get(Result.SKIRT_POWER));
+        assertFalse(assessment.results().containsKey(Result.BED_AREA));
+        assertEquals(List.of(), assessment.remedies());
+        LoadingZone fromTop = bare.withStations(List.of()).withStation(1, 0.1, DepthMethod.FROM_BOARD_TOP, 0);
+        assertFalse(Engine.assess(fromTop, Settings.standard()).results().containsKey(Result.SKIRT_POWER));
+        assertTrue(Engine.assess(fromTop.with(Datum.READ_HEIGHT, 0.3, 0), Settings.standard()).results()
+                .containsKey(Result.SKIRT_POWER));
+        assertFalse(Engine.assess(fromTop.with(Datum.READ_HEIGHT, 0.05, 0), Settings.standard()).results()
+                .containsKey(Result.SKIRT_POWER), "below the board the section decides");
     }
 
     @Test
@@ -188,7 +206,7 @@ class MissingReadingsTest {
 
     @Test
     void theSitesOwnSealRateIsSaid() {
-        Settings own = Settings.standard().with(new bedmark.engine.seal.SealRates(50, Map.of()));
+        Settings own = Settings.standard().with(new SealRates(50, Map.of()));
         assertTrue(Engine.assess(ZONE, own).assumptions().contains(Assumption.of("seal-rate-site", "50.0")));
         Settings worn = Settings.standard().with(
                 Settings.standard().sealRates().with(SealType.VERTICAL, SealCondition.SOUND, 1.5));

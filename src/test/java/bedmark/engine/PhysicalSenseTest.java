@@ -138,16 +138,14 @@ class PhysicalSenseTest {
         Random random = new Random(8);
         for (int i = 0; i < 200; i++) {
             Section section = section(random);
-            Uncertain height = Uncertain.exact(0.3);
-            falls(section, 0.3 + section.troughDepth().value() + section.crownRise().value(),
-                    raw -> section.level(Uncertain.exact(raw), DepthMethod.AT_CENTRE, height).value());
-            falls(section, 0.6 + section.troughDepth().value() + section.crownRise().value(), lowered ->
-                    section.level(Uncertain.exact(Math.max(0, 0.6 + section.troughDepth().value()
-                            + section.crownRise().value() - lowered)), DepthMethod.FROM_BOARD_TOP, height).value());
+            double rise = section.troughDepth().value() + section.crownRise().value();
+            falls(section, 0.3 + rise, centre -> section.levelOfCentreDepth(Uncertain.exact(centre)).value());
+            falls(section, 0.3 + rise, above -> above >= rise ? above - rise
+                    : section.levelUnderBoardLine(Uncertain.exact(rise - above)).value());
         }
     }
 
-    /** From a full bed to none in small steps of the reading: never up, never by a jump, and empty in the end. */
+    /** From a full bed to none in small steps of its height: never up, never by a jump, and empty in the end. */
     private static void falls(Section section, double full, DoubleUnaryOperator level) {
         int steps = 2_000;
         double before = level.applyAsDouble(full);

@@ -53,8 +53,9 @@ class MissingReadingsTest {
         assertEquals(List.of(), assessment.missingRequired());
         assertTrue(assessment.assumptions().contains(Assumption.of("register-used", "/transfer/skirtSpacing")));
         assertTrue(assessment.assumptions().contains(Assumption.of("register-used", "/transfer/skirtHeight")));
-        assertEquals(List.of("/readings/skirtSpacing", "/readings/skirtHeight"), Engine.assess(registered
-                .without(Datum.REGISTER_SPACING).without(Datum.REGISTER_HEIGHT), Settings.standard()).missingRequired());
+        assertEquals(List.of("/readings/skirtSpacing", "/readings/skirtHeight"), Engine.assess(
+                registered.without(Datum.REGISTER_SPACING).without(Datum.REGISTER_HEIGHT),
+                Settings.standard()).missingRequired());
     }
 
     @Test

@@ -68,8 +68,8 @@ final class Appraisal {
         lowerBound(findings, loadToday).ifPresent(assumptions::add);
         Level level = level(findings, required);
         return new Assessment(today.materialDrag().value().map(drag -> today.method()),
-                estimates(Result.class, results), estimates(DragMethod.class, today.methods()), energyKind(), profile, level,
-                design.map(feed -> level(atDesign, required)), findings, atDesign, allowedDepths(),
+                estimates(Result.class, results), estimates(DragMethod.class, today.methods()), energyKind(), profile,
+                level, design.map(feed -> level(atDesign, required)), findings, atDesign, allowedDepths(),
                 new Remedies(zone.zone(), zone.settings()).all(), assumptions,
                 requirements.all(required, numbers), required, zone.sidesWithoutSeals(),
                 today.skirtPower().value().map(tape::shares).orElse(List.<Share>of()), leading(), repeat(findings));

@@ -70,8 +70,8 @@ public final class Glass {
     }
 
     /**
-     * Writes a scene into {@code target/pictures}, with so many pixels for each logical one. Fails where the scene leaves
-     * part of the glass bare, or shows next to nothing.
+     * Writes a scene into {@code target/pictures}, with so many pixels for each logical one. Fails where the scene
+     * leaves part of the glass bare, or shows next to nothing.
      */
     public static void picture(String name, Supplier<Parent> root, Light light, Density density, double width,
                                double height, double scale) throws Exception {

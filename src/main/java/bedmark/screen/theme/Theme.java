@@ -21,7 +21,8 @@ public final class Theme {
      */
     public static void apply(Scene scene, Light light, Density density) {
         Typeface.load();
-        List<String> sheets = List.of(asAddress(tokens(light)), asAddress(density.transcribe(read("theme.css"))));
+        List<String> sheets = List.of(asAddress(tokens(light)),
+                asAddress(density.transcribe(read("theme.css"))), asAddress(density.transcribe(read("controls.css"))));
         if (!scene.getStylesheets().equals(sheets)) {
             scene.getStylesheets().setAll(sheets);
         }

@@ -30,8 +30,10 @@ class ThemeTest {
     private static final Pattern TYPE = Pattern.compile("-fx-font-size: (\\d+)px");
 
     private static String sheet(Density density) throws Exception {
-        try (InputStream in = Theme.class.getResourceAsStream("theme.css")) {
-            return density.transcribe(new String(in.readAllBytes(), StandardCharsets.UTF_8));
+        try (InputStream theme = Theme.class.getResourceAsStream("theme.css");
+                InputStream controls = Theme.class.getResourceAsStream("controls.css")) {
+            return density.transcribe(new String(theme.readAllBytes(), StandardCharsets.UTF_8)
+                    + new String(controls.readAllBytes(), StandardCharsets.UTF_8));
         }
     }
 

@@ -103,7 +103,7 @@ class TokensTest {
 
     @Test
     void onlyTheTokenFileHoldsColours() throws IOException {
-        String theme = text("theme.css");
+        String theme = text("theme.css") + text("controls.css");
         assertFalse(Pattern.compile("#[0-9A-Fa-f]{3,8}\\b|rgba?\\(|hsba?\\(").matcher(theme).find());
         for (String word : List.of("white", "black", "gray", "grey", "red", "blue")) {
             assertFalse(Pattern.compile(": [^;]*\\b" + word + "\\b").matcher(theme).find(), word);

@@ -8,10 +8,14 @@ import java.util.Base64;
 import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
+import java.util.stream.Stream;
 import javafx.scene.Scene;
 
 /** Dresses a scene: typeface, colours of the light, sizes of the density. */
 public final class Theme {
+    /** The sheets that hold the look, in their order; lengths in them are those of the glass. */
+    static final List<String> SHEETS = List.of("theme.css", "parts.css", "controls.css");
+
     private Theme() {
     }
 
@@ -21,8 +25,8 @@ public final class Theme {
      */
     public static void apply(Scene scene, Light light, Density density) {
         Typeface.load();
-        List<String> sheets = List.of(asAddress(tokens(light)),
-                asAddress(density.transcribe(read("theme.css"))), asAddress(density.transcribe(read("controls.css"))));
+        List<String> sheets = Stream.concat(Stream.of(tokens(light)), SHEETS.stream()
+                .map(name -> density.transcribe(read(name)))).map(Theme::asAddress).toList();
         if (!scene.getStylesheets().equals(sheets)) {
             scene.getStylesheets().setAll(sheets);
         }
@@ -41,7 +45,7 @@ public final class Theme {
                 + Base64.getEncoder().encodeToString(sheet.getBytes(StandardCharsets.UTF_8));
     }
 
-    private static String read(String name) {
+    static String read(String name) {
         try (InputStream in = Objects.requireNonNull(Theme.class.getResourceAsStream(name))) {
             return new String(in.readAllBytes(), StandardCharsets.UTF_8);
         } catch (IOException e) {

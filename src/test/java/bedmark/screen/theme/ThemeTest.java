@@ -5,8 +5,6 @@ import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.screen.Glass;
-import java.io.InputStream;
-import java.nio.charset.StandardCharsets;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
@@ -29,12 +27,8 @@ import org.junit.jupiter.api.Test;
 class ThemeTest {
     private static final Pattern TYPE = Pattern.compile("-fx-font-size: (\\d+)px");
 
-    private static String sheet(Density density) throws Exception {
-        try (InputStream theme = Theme.class.getResourceAsStream("theme.css");
-                InputStream controls = Theme.class.getResourceAsStream("controls.css")) {
-            return density.transcribe(new String(theme.readAllBytes(), StandardCharsets.UTF_8)
-                    + new String(controls.readAllBytes(), StandardCharsets.UTF_8));
-        }
+    private static String sheet(Density density) {
+        return density.transcribe(String.join("", Theme.SHEETS.stream().map(Theme::read).toList()));
     }
 
     @Test

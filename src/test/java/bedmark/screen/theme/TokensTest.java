@@ -5,9 +5,6 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.picture.Ink;
-import java.io.IOException;
-import java.io.InputStream;
-import java.nio.charset.StandardCharsets;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
@@ -23,15 +20,13 @@ class TokensTest {
     private static final Pattern BLOCK = Pattern.compile("\\.(day|night) \\{([^}]*)}");
     private static final Pattern TOKEN = Pattern.compile("-bm-([a-z-]+): #([0-9A-F]{6});");
 
-    private static String text(String name) throws IOException {
-        try (InputStream in = Theme.class.getResourceAsStream(name)) {
-            return new String(in.readAllBytes(), StandardCharsets.UTF_8);
-        }
+    private static String look() {
+        return String.join("", Theme.SHEETS.stream().map(Theme::read).toList());
     }
 
-    private static Map<Light, Map<String, Integer>> tokens() throws IOException {
+    private static Map<Light, Map<String, Integer>> tokens() {
         Map<Light, Map<String, Integer>> tokens = new HashMap<>();
-        Matcher block = BLOCK.matcher(text("tokens.css"));
+        Matcher block = BLOCK.matcher(Theme.read("tokens.css"));
         while (block.find()) {
             Map<String, Integer> colours = new HashMap<>();
             Matcher token = TOKEN.matcher(block.group(2));
@@ -69,7 +64,7 @@ class TokensTest {
     @CsvSource({"ink,ground", "ink,paper", "ink,board", "ink,held", "soft,ground", "soft,paper", "soft,board",
         "soft,held", "over,ground", "over,paper", "on-accent,accent", "on-accent,accent-held", "on-over,over",
         "ground,ink"})
-    void textStandsOutSevenToOne(String text, String under) throws IOException {
+    void textStandsOutSevenToOne(String text, String under) {
         for (Light light : Light.values()) {
             Map<String, Integer> colours = tokens().get(light);
             double contrast = contrast(colours.get(text), colours.get(under));
@@ -79,7 +74,7 @@ class TokensTest {
 
     @ParameterizedTest
     @CsvSource({"soft,ground", "accent,ground", "accent,paper", "ink,bed", "over,ground"})
-    void linesStandOutThreeToOne(String line, String under) throws IOException {
+    void linesStandOutThreeToOne(String line, String under) {
         for (Light light : Light.values()) {
             Map<String, Integer> colours = tokens().get(light);
             double contrast = contrast(colours.get(line), colours.get(under));
@@ -88,22 +83,22 @@ class TokensTest {
     }
 
     @Test
-    void bothLightsHaveTheSameTokens() throws IOException {
+    void bothLightsHaveTheSameTokens() {
         assertEquals(tokens().get(Light.DAY).keySet(), tokens().get(Light.NIGHT).keySet());
     }
 
     @Test
-    void everyInkHasItsToken() throws IOException {
+    void everyInkHasItsToken() {
         for (Ink ink : Ink.values()) {
             String name = ink.name().toLowerCase(Locale.ROOT);
             assertTrue(tokens().get(Light.DAY).containsKey(name), name);
-            assertTrue(text("theme.css").contains("-bm-ink-" + name + ": -bm-" + name + ";"), name);
+            assertTrue(look().contains("-bm-ink-" + name + ": -bm-" + name + ";"), name);
         }
     }
 
     @Test
-    void onlyTheTokenFileHoldsColours() throws IOException {
-        String theme = text("theme.css") + text("controls.css");
+    void onlyTheTokenFileHoldsColours() {
+        String theme = look();
         assertFalse(Pattern.compile("#[0-9A-Fa-f]{3,8}\\b|rgba?\\(|hsba?\\(").matcher(theme).find());
         for (String word : List.of("white", "black", "gray", "grey", "red", "blue")) {
             assertFalse(Pattern.compile(": [^;]*\\b" + word + "\\b").matcher(theme).find(), word);

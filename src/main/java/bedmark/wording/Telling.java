@@ -46,8 +46,9 @@ public final class Telling {
     /** Tells an assessment. */
     public Told tell(Assessment assessment) {
         Optional<Finding> leading = leading(assessment);
-        return new Told(sentence(assessment, leading), leading.flatMap(finding -> sure(assessment, finding)),
-                Optional.of(atDesign(assessment)), figures(assessment), action(assessment, leading),
+        Optional<String> atDesign = assessment.level() == Level.INCOMPLETE ? Optional.empty()
+                : Optional.of(atDesign(assessment));
+        return new Told(sentence(assessment, leading), leading.flatMap(finding -> sure(assessment, finding)), atDesign, figures(assessment), action(assessment, leading),
                 assessment.repeat().map(name -> wording.text("verdict.repeat", wording.reading(name, form))));
     }
 
@@ -97,6 +98,12 @@ public final class Telling {
             return wording.computed(number, wording.units().unit(Dimension.SPEED));
         }
         return TIMES.contains(finding.rule()) ? wording.format().computed(number, 1) : wording.percent(number);
+    }
+
+    /** A limit of a finding in the way in which its rule is spoken of. */
+    public String limit(Finding finding, double limit) {
+        return TIMES.contains(finding.rule()) ? wording.format().exact(BigDecimal.valueOf(limit))
+                : observed(finding, limit);
     }
 
     private Optional<String> sure(Assessment assessment, Finding leading) {

@@ -105,6 +105,13 @@ public record Wording(Words words, UnitSystem units) {
         return text("assumption." + assumption.code(), arguments);
     }
 
+    /** A label as it stands within a sentence: a capital at its start is no name, unless more of them follow. */
+    private String inSentence(String label) {
+        boolean plain = label.length() > 1 && Character.isUpperCase(label.charAt(0))
+                && Character.isLowerCase(label.charAt(1));
+        return plain ? label.substring(0, 1).toLowerCase(words.locale()) + label.substring(1) : label;
+    }
+
     /** An argument of the engine for people: a number in the locale's form, a code in words. */
     private String spoken(String argument) {
         try {
@@ -124,7 +131,7 @@ public record Wording(Words words, UnitSystem units) {
         Pointer place = Pointer.parse(name);
         Optional<String> line = place.tokens().stream().filter(token -> token.matches("[0-9]+")).findFirst()
                 .map(index -> format().computed(Double.parseDouble(index) + 1, 0));
-        String label = form.fieldAt(place).map(field -> field.head().label().in(words.language()))
+        String label = form.fieldAt(place).map(field -> inSentence(field.head().label().in(words.language())))
                 .orElseGet(() -> {
                     String key = "register." + place.last();
                     return words.has(key) ? text(key) : name;

@@ -19,8 +19,8 @@ class QuantityFormatTest {
     @CsvSource({"9.50, 9.50, '9,50'", "1234, 1234, 1234", "12345.60, 12_345.60, '12_345,60'",
         "-1234567, −1_234_567, −1_234_567", "0.250, 0.250, '0,250'", "1E+5, 100_000, 100_000"})
     void enteredNumbersKeepEveryDigit(String number, String english, String spanish) {
-        assertEquals(english.replace('_', '\u202F'), ENGLISH.exact(new BigDecimal(number)));
-        assertEquals(spanish.replace('_', '\u202F'), SPANISH.exact(new BigDecimal(number)));
+        assertEquals(english.replace('_', QuantityFormat.THOUSANDS), ENGLISH.exact(new BigDecimal(number)));
+        assertEquals(spanish.replace('_', QuantityFormat.THOUSANDS), SPANISH.exact(new BigDecimal(number)));
     }
 
     @ParameterizedTest
@@ -30,7 +30,7 @@ class QuantityFormatTest {
         "0.2836, PERCENT, 28.4", "0.9996, PERCENT, 100", "12345.6, NEWTON, 12_346", "0, KILOWATT, 0",
         "-0.0000001, KILOWATT, 0.000", "-120.4, NEWTON, −120"})
     void computedNumbersGetWhatTheirUnitDeserves(double si, Unit unit, String shown) {
-        assertEquals(shown.replace('_', '\u202F'), ENGLISH.computed(si, unit));
+        assertEquals(shown.replace('_', QuantityFormat.THOUSANDS), ENGLISH.computed(si, unit));
     }
 
     @Test

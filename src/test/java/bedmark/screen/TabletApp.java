@@ -10,8 +10,11 @@ import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 import javafx.application.Platform;
+import javafx.geometry.Bounds;
 import javafx.scene.Node;
+import javafx.scene.Parent;
 import javafx.scene.control.Labeled;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.testfx.api.FxRobot;
@@ -74,9 +77,29 @@ public final class TabletApp implements AutoCloseable {
         settle();
     }
 
-    public void click(String id) throws TimeoutException {
-        robot.clickOn(node(id));
+    /** Clicks the node with an id; a list is first moved so far that it is in sight. */
+    public void click(String id) throws Exception {
+        Node node = node(id);
+        Glass.on(() -> {
+            reveal(node);
+            return null;
+        });
         settle();
+        robot.clickOn(node);
+        settle();
+    }
+
+    private static void reveal(Node node) {
+        for (Parent parent = node.getParent(); parent != null; parent = parent.getParent()) {
+            if (parent instanceof ScrollPane scroll) {
+                double room = scroll.getViewportBounds().getHeight();
+                double all = scroll.getContent().getBoundsInLocal().getHeight();
+                Bounds bounds = scroll.getContent().sceneToLocal(node.localToScene(node.getBoundsInLocal()));
+                if (all > room) {
+                    scroll.setVvalue(Math.max(0, Math.min(1, (bounds.getCenterY() - room / 2) / (all - room))));
+                }
+            }
+        }
     }
 
     /** Types with the keyboard, wherever the focus is. */

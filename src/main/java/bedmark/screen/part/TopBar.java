@@ -23,6 +23,7 @@ public final class TopBar extends HBox {
         Region between = new Region();
         HBox.setHgrow(between, Priority.ALWAYS);
         title.setMinWidth(USE_PREF_SIZE);
+        subtitle.setWrapText(true);
         aside.setMinWidth(USE_PREF_SIZE);
         getChildren().addAll(title, subtitle, between, aside);
         getChildren().addAll(more);

@@ -115,6 +115,7 @@ public final class RoundView implements Screen {
         open.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
         open.setId("stop-" + row.transfer());
         open.setAccessibleText(row.tag() + ", " + row.what() + ", " + state(row));
+        open.getStyleClass().add("secondary-target");
         open.setMaxWidth(Double.MAX_VALUE);
         content.prefWidthProperty().bind(open.widthProperty().subtract(36));
         HBox.setHgrow(open, Priority.ALWAYS);
@@ -123,6 +124,7 @@ public final class RoundView implements Screen {
         if (row.progress() == RoundRow.Progress.TO_DO || row.progress() == RoundRow.Progress.BEGUN) {
             ActionButton skip = new ActionButton(Weight.QUIET, wording.text("screen.round.skip"), () -> askWhy(row));
             skip.setId("skip-" + row.transfer());
+            skip.getStyleClass().add("secondary-target");
             line.getChildren().add(skip);
         }
         return line;

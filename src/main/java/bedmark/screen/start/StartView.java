@@ -70,7 +70,7 @@ public final class StartView implements Screen {
 
     private void ask() {
         questions.getChildren().clear();
-        if (!model.hasPlant()) {
+        if (!model.hasPlant() || model.loadingProperty().get() >= 0) {
             offerDemo();
             questions.getChildren().addAll(choice("screen.start.language", languages()));
             return;
@@ -99,8 +99,10 @@ public final class StartView implements Screen {
     }
 
     private void offerDemo() {
-        Label empty = wrapped(wording.text(model.canLoadDemo() ? "screen.start.empty" : "screen.start.empty-no-demo"));
-        questions.getChildren().add(empty);
+        if (!model.hasPlant()) {
+            questions.getChildren().add(wrapped(wording.text(model.canLoadDemo() ? "screen.start.empty"
+                    : "screen.start.empty-no-demo")));
+        }
         model.troubleProperty().get().ifPresent(defect ->
                 questions.getChildren().add(wrapped(wording.sentence(defect))));
         double share = model.loadingProperty().get();

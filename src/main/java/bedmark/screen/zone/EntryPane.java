@@ -24,6 +24,9 @@ import javafx.scene.Parent;
 import javafx.scene.control.Button;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextArea;
+import javafx.scene.control.TextInputControl;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
@@ -46,8 +49,7 @@ final class EntryPane extends StackPane {
         this.wording = wording;
         this.numericPad = new NumericPad(pad, words(wording));
         getStyleClass().add("entry-pane");
-        listening.to(model.activeProperty(), this::show);
-        listening.onChange(model.unitProperty(), unit -> show(model.activeProperty().get()));
+        listening.to(model.inHandProperty(), inHand -> show(inHand.slot()));
         listening.onChange(model.typedProperty(), typed -> typed());
         listening.onChange(model.surveyProperty(), survey -> chosen());
     }
@@ -55,6 +57,35 @@ final class EntryPane extends StackPane {
     /** Lets a keyboard do what the pad does, wherever the focus is in that part of the screen. */
     void listenIn(Parent part) {
         PadKeyboard.listen(part, pad);
+        part.addEventHandler(KeyEvent.KEY_PRESSED, this::pressed);
+    }
+
+    /** Where no number is typed: Enter goes on, Shift-Enter back, and a digit takes the choice of that place. */
+    private void pressed(KeyEvent event) {
+        if (pad.setupProperty().get().isPresent() || event.getTarget() instanceof TextInputControl
+                || event.getTarget() instanceof Button) {
+            return;
+        }
+        if (event.getCode() == KeyCode.ENTER) {
+            move(event.isShiftDown());
+            event.consume();
+        } else if (event.getCode().isDigitKey() || event.getCode().isKeypadKey()) {
+            lookupAll(".choice").stream().skip(Math.max(0, digit(event) - 1L)).findFirst()
+                    .filter(choice -> digit(event) > 0).ifPresent(choice -> ((Button) choice).fire());
+            event.consume();
+        }
+    }
+
+    private static int digit(KeyEvent event) {
+        return event.getText().length() == 1 ? Character.digit(event.getText().charAt(0), 10) : 0;
+    }
+
+    private void move(boolean back) {
+        if (back) {
+            model.back();
+        } else {
+            model.next();
+        }
     }
 
     private static PadWords words(Wording wording) {
@@ -87,7 +118,7 @@ final class EntryPane extends StackPane {
             ActionButton button = new ActionButton(said ? Weight.PRIMARY : Weight.PLAIN,
                     wording.text("screen.belt." + state.code()), () -> {
                         model.sayBeltState(state);
-                        show(model.activeProperty().get());
+                        show(model.active());
                     });
             button.setId("belt-" + state.code());
             button.setMaxWidth(Double.MAX_VALUE);
@@ -100,7 +131,7 @@ final class EntryPane extends StackPane {
     private PadSetup setup(Slot slot) {
         char sign = wording.format().decimalSign();
         if (slot instanceof Slot.MeasureSlot measured) {
-            Unit unit = model.unitProperty().get();
+            Unit unit = model.inHandProperty().get().unit().orElseThrow();
             String step = wording.format().exact(measured.measure().step(unit));
             List<Unit> units = measured.measure().units();
             return new PadSetup(sign, false, unit == Unit.INCH, Optional.of(new PadSetup.Steps("\u2212" + step,
@@ -141,7 +172,7 @@ final class EntryPane extends StackPane {
     }
 
     private void chosen() {
-        Slot slot = model.activeProperty().get();
+        Slot slot = model.active();
         if (!(slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot || slot instanceof Slot.TextSlot)) {
             show(slot);
         } else if (!editing && pad.setupProperty().get().isPresent() && model.typedProperty().get().isEmpty()) {
@@ -172,6 +203,7 @@ final class EntryPane extends StackPane {
                         }
                     });
             button.setId("choice-" + choice.code());
+            button.getStyleClass().add("choice");
             button.setMaxWidth(Double.MAX_VALUE);
             grid.add(button, i % COLUMNS, i / COLUMNS);
         }
@@ -218,6 +250,13 @@ final class EntryPane extends StackPane {
                 model.typedProperty().set(now);
             }
             editing = false;
+        });
+        // A text of one line ends with Enter; in one of several lines Enter is a line end, and Tab leads on.
+        area.addEventFilter(KeyEvent.KEY_PRESSED, event -> {
+            if (event.getCode() == KeyCode.ENTER && !slot.field().lines()) {
+                move(event.isShiftDown());
+                event.consume();
+            }
         });
         VBox.setVgrow(area, Priority.ALWAYS);
         VBox pane = new VBox(area, moves());

@@ -40,9 +40,8 @@ final class FormPane extends VBox {
         listening.onChange(model.surveyProperty(), survey -> update());
         listening.onChange(model.typedProperty(), typed -> update());
         listening.onChange(model.noteProperty(), note -> update());
-        listening.onChange(model.unitProperty(), unit -> update());
         listening.onChange(model.beltStateProperty(), state -> caution());
-        listening.to(model.activeProperty(), slot -> activated());
+        listening.to(model.inHandProperty(), inHand -> activated());
     }
 
     private void layOut(List<SlotRow> wanted) {

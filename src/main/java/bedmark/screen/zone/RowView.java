@@ -131,7 +131,7 @@ final class RowView extends VBox {
         for (Slot slot : row.slots()) {
             update(slot, boxes.get(slot.where()));
         }
-        boolean here = row.slots().stream().anyMatch(slot -> slot.equals(model.activeProperty().get()));
+        boolean here = row.slots().stream().anyMatch(slot -> slot.equals(model.active()));
         Optional<ZoneModel.Note> note = here ? model.noteProperty().get() : Optional.empty();
         message.setText(note.map(this::sentence).orElse(""));
         boolean wrong = note.filter(RowView::isWrong).isPresent();
@@ -139,7 +139,7 @@ final class RowView extends VBox {
     }
 
     private void update(Slot slot, FieldBox box) {
-        boolean active = slot.equals(model.activeProperty().get());
+        boolean active = slot.equals(model.active());
         box.activeProperty().set(active);
         String typed = model.typedProperty().get();
         Unit unit = unit(slot);
@@ -159,6 +159,7 @@ final class RowView extends VBox {
         quality.filter(button -> slot instanceof Slot.MeasureSlot measured && measured.markable()).ifPresent(button -> {
             Optional<Quality> mark = model.answer(slot).flatMap(SlotWords::quantity).flatMap(Quantity::quality);
             button.setVisible(mark.isPresent());
+            button.setManaged(mark.isPresent());
             mark.ifPresent(button.qualityProperty()::set);
         });
     }
@@ -167,7 +168,7 @@ final class RowView extends VBox {
         if (!(slot instanceof Slot.MeasureSlot measured)) {
             return null;
         }
-        return slot.equals(model.activeProperty().get()) ? model.unitProperty().get()
+        return slot.equals(model.active()) ? model.inHandProperty().get().unit().orElseThrow()
                 : model.answer(slot).flatMap(SlotWords::quantity).map(Quantity::unit)
                         .orElse(measured.measure().unit(model.unitsProperty().get()));
     }
@@ -199,13 +200,11 @@ final class RowView extends VBox {
 
     /** Puts the focus on the active box, if it is in this row. */
     void focusActive() {
-        Optional.ofNullable(model.activeProperty().get()).map(slot -> boxes.get(slot.where()))
-                .ifPresent(FieldBox::requestFocus);
+        Optional.ofNullable(boxes.get(model.active().where())).ifPresent(FieldBox::requestFocus);
     }
 
     /** Whether the active cell is in this row. */
     boolean holdsActive() {
-        return Optional.ofNullable(model.activeProperty().get()).filter(slot -> boxes.containsKey(slot.where()))
-                .isPresent();
+        return boxes.containsKey(model.active().where());
     }
 }

@@ -54,7 +54,7 @@ final class RulesPane extends VBox {
         LevelGlyph glyph = new LevelGlyph(LevelShape.valueOf(finding.level().name()));
         Label name = wrapped(wording.text("rule." + finding.code()));
         name.getStyleClass().add("rule-name");
-        Label clause = wrapped(telling.clause(finding) + limits(finding, telling, wording));
+        Label clause = wrapped(telling.clause(finding) + "." + limits(finding, telling, wording));
         VBox words = new VBox(name, clause);
         HBox.setHgrow(words, Priority.ALWAYS);
         Label level = new Label(telling.level(finding.level()) + probability(finding, wording));
@@ -68,9 +68,9 @@ final class RulesPane extends VBox {
     private static String limits(Finding finding, Telling telling, Wording wording) {
         StringBuilder limits = new StringBuilder();
         finding.near().ifPresent(near -> limits.append(" ").append(wording.text("screen.rules.near",
-                telling.observed(finding, near))));
+                telling.limit(finding, near))));
         finding.overloaded().ifPresent(over -> limits.append(" ").append(wording.text("screen.rules.over",
-                telling.observed(finding, over))));
+                telling.limit(finding, over))));
         return limits.append(" ").append(wording.text(finding.assumption() ? "screen.rules.source-assumed"
                 : "screen.rules.source", finding.source())).toString();
     }

@@ -62,14 +62,21 @@ public final class ZoneModel {
     private final ReadOnlyObjectWrapper<Branch> saved;
     private final ReadOnlyObjectWrapper<Branch> survey;
     private final ReadOnlyObjectWrapper<List<SlotRow>> rows;
-    private final ReadOnlyObjectWrapper<Slot> active = new ReadOnlyObjectWrapper<>();
+    private final ReadOnlyObjectWrapper<InHand> inHand = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<Outcome> outcome;
     private final ReadOnlyObjectWrapper<Optional<Note>> note = new ReadOnlyObjectWrapper<>(Optional.empty());
-    private final ReadOnlyObjectWrapper<Unit> unit = new ReadOnlyObjectWrapper<>();
     private final StringProperty typed = new SimpleStringProperty("");
     private final ObjectProperty<UnitSystem> units = new SimpleObjectProperty<>(UnitSystem.METRIC);
     private final ObjectProperty<Locale> locale = new SimpleObjectProperty<>(Locale.ENGLISH);
     private final ObjectProperty<Optional<BeltState>> beltState = new SimpleObjectProperty<>(Optional.empty());
+
+    /**
+     * The cell that is filled in now.
+     *
+     * @param unit the unit in which it is typed, where it has one
+     */
+    public record InHand(Slot slot, Optional<Unit> unit) {
+    }
 
     /** Something to say below the active cell. */
     public sealed interface Note {
@@ -109,7 +116,14 @@ public final class ZoneModel {
         typed.addListener((property, before, now) -> preview());
         this.units.addListener((property, before, now) -> unitChanged());
         this.locale.addListener((property, before, now) -> preview());
-        activate(slots().get(0));
+        activate(firstToAnswer());
+    }
+
+    /** Where work begins: the first gap, or the first cell where there is none. */
+    private Slot firstToAnswer() {
+        return setting.form().gaps(saved.get()).stream().filter(gap -> open())
+                .flatMap(gap -> slots().stream().filter(slot -> slot.field().equals(gap))).findFirst()
+                .orElseGet(() -> slots().get(0));
     }
 
     /** What the survey comes to: an assessment, or why there can be none. */
@@ -129,8 +143,14 @@ public final class ZoneModel {
         return rows.getReadOnlyProperty();
     }
 
-    public ReadOnlyObjectProperty<Slot> activeProperty() {
-        return active.getReadOnlyProperty();
+    /** The cell that is filled in now; there always is one. */
+    public ReadOnlyObjectProperty<InHand> inHandProperty() {
+        return inHand.getReadOnlyProperty();
+    }
+
+    /** The active cell. */
+    public Slot active() {
+        return inHand.get().slot();
     }
 
     public ReadOnlyObjectProperty<Outcome> outcomeProperty() {
@@ -139,11 +159,6 @@ public final class ZoneModel {
 
     public ReadOnlyObjectProperty<Optional<Note>> noteProperty() {
         return note.getReadOnlyProperty();
-    }
-
-    /** The unit in which the active cell is typed; nothing where it has none. */
-    public ReadOnlyObjectProperty<Unit> unitProperty() {
-        return unit.getReadOnlyProperty();
     }
 
     /** What is typed into the active cell; empty where nothing was typed since it became active. */
@@ -191,10 +206,9 @@ public final class ZoneModel {
     }
 
     private void show(Slot slot) {
-        active.set(slot);
-        unit.set(unitOf(slot));
-        note.set(firstJudgement(slot));
         typed.set("");
+        inHand.set(new InHand(slot, unitOf(slot)));
+        note.set(firstJudgement(slot));
     }
 
     /** Makes the cell at a place active, where there is one. */
@@ -215,7 +229,7 @@ public final class ZoneModel {
     }
 
     private void move(int step) {
-        Slot here = active.get();
+        Slot here = active();
         if (!keep()) {
             return;
         }
@@ -246,7 +260,7 @@ public final class ZoneModel {
     /** Whether the active cell is the last of the form. */
     public boolean atEnd() {
         List<Slot> slots = slots();
-        return indexOf(slots, active.get().where()) == slots.size() - 1;
+        return indexOf(slots, active().where()) == slots.size() - 1;
     }
 
     /**
@@ -255,10 +269,10 @@ public final class ZoneModel {
      * @return false where the typing is no number; it then stays in the pad and the note says why
      */
     public boolean keep() {
-        Slot slot = active.get();
-        if (slot == null || typed.get().isEmpty() || !open()) {
+        if (typed.get().isEmpty() || !open()) {
             return true;
         }
+        Slot slot = active();
         Optional<Node> answer = typedAnswer(slot);
         if (answer.isEmpty()) {
             return false;
@@ -287,9 +301,9 @@ public final class ZoneModel {
             return typed.get();
         }
         char sign = new QuantityFormat(locale.get()).decimalSign();
-        return answer(active.get()).map(node -> {
+        return answer(active()).map(node -> {
             if (node instanceof Branch) {
-                return quantity(saved.get(), active.get().where()).map(read -> inUnit(read, sign)).orElse("");
+                return quantity(saved.get(), active().where()).map(read -> inUnit(read, sign)).orElse("");
             }
             return node instanceof Node.Decimal number ? number.value().toPlainString().replace('.', sign)
                     : node instanceof Node.Text text ? text.value() : "";
@@ -297,17 +311,17 @@ public final class ZoneModel {
     }
 
     private String inUnit(Quantity read, char sign) {
-        if (read.unit() == unit.get()) {
+        if (read.unit() == unit()) {
             return read.entered().orElseGet(() -> read.value().toPlainString().replace('.', sign));
         }
-        return unit.get().convert(read.value(), read.unit()).round(new MathContext(4)).stripTrailingZeros()
+        return unit().convert(read.value(), read.unit()).round(new MathContext(4)).stripTrailingZeros()
                 .toPlainString().replace('.', sign);
     }
 
     /** Changes the number in the active cell by one step of its unit. */
     public void step(int direction) {
-        Slot slot = active.get();
-        BigDecimal step = slot instanceof Slot.MeasureSlot measured ? measured.measure().step(unit.get())
+        Slot slot = active();
+        BigDecimal step = slot instanceof Slot.MeasureSlot measured ? measured.measure().step(unit())
                 : slot instanceof Slot.CountSlot counted ? counted.count().step() : BigDecimal.ZERO;
         String now = editable();
         TypedNumber number = new NumberEntry(locale.get()).read(now.isEmpty() ? "0" : now);
@@ -321,16 +335,16 @@ public final class ZoneModel {
 
     /** Goes on to the next unit that the active cell can be typed in; what is typed is not converted. */
     public void switchUnit() {
-        if (active.get() instanceof Slot.MeasureSlot measured) {
+        if (active() instanceof Slot.MeasureSlot measured) {
             List<Unit> offered = measured.measure().units();
-            chooseUnit(offered.get((offered.indexOf(unit.get()) + 1) % offered.size()));
+            chooseUnit(offered.get((offered.indexOf(unit()) + 1) % offered.size()));
         }
     }
 
     /** Clears the active cell. */
     public void clear() {
         typed.set("");
-        set(active.get(), Optional.empty());
+        set(active(), Optional.empty());
     }
 
     private void set(Pointer where, Optional<Node> answer) {
@@ -456,7 +470,7 @@ public final class ZoneModel {
 
     /** Marks the active reading. A depth is measured on an isolated belt only. */
     public void mark(Quality quality) {
-        Slot slot = active.get();
+        Slot slot = active();
         keep();
         Optional<Quantity> reading = quantity(saved.get(), slot.where());
         boolean running = beltState.get().or(() -> reading.flatMap(Quantity::beltState))
@@ -473,25 +487,30 @@ public final class ZoneModel {
 
     /** Types on in another unit; what stands in the cell keeps the unit that it was entered in. */
     public void chooseUnit(Unit chosen) {
-        chosenUnits.put(active.get().where(), chosen);
-        unit.set(chosen);
+        chosenUnits.put(active().where(), chosen);
+        inHand.set(new InHand(active(), Optional.of(chosen)));
         preview();
     }
 
     private void unitChanged() {
-        if (typed.get().isEmpty() && active.get() != null) {
-            unit.set(unitOf(active.get()));
+        if (typed.get().isEmpty()) {
+            inHand.set(new InHand(active(), unitOf(active())));
         }
     }
 
-    private Unit unitOf(Slot slot) {
+    private Optional<Unit> unitOf(Slot slot) {
         if (!(slot instanceof Slot.MeasureSlot measured)) {
-            return null;
+            return Optional.empty();
         }
         return Optional.ofNullable(chosenUnits.get(slot.where()))
                 .or(() -> quantity(saved.get(), slot.where()).map(Quantity::unit)
                         .filter(measured.measure().units()::contains))
-                .orElseGet(() -> measured.measure().unit(units.get()));
+                .or(() -> Optional.of(measured.measure().unit(units.get())));
+    }
+
+    /** The unit in which the active cell is typed; only where it is a number with a unit. */
+    private Unit unit() {
+        return inHand.get().unit().orElseThrow();
     }
 
     private void refresh() {
@@ -505,9 +524,8 @@ public final class ZoneModel {
     }
 
     private void preview() {
-        Slot slot = active.get();
-        Branch now = slot == null || typed.get().isEmpty() ? saved.get()
-                : typedAnswer(slot).map(answer -> Answers.change(saved.get(), slot.where(), Optional.of(answer))
+        Branch now = typed.get().isEmpty() ? saved.get()
+                : typedAnswer(active()).map(answer -> Answers.change(saved.get(), active().where(), Optional.of(answer))
                         .in(saved.get())).orElse(saved.get());
         if (!Objects.equals(survey.get(), now)) {
             survey.set(now);
@@ -529,7 +547,7 @@ public final class ZoneModel {
             return Optional.of(Node.text(typed.get()));
         }
         NumberEntry entry = new NumberEntry(locale.get());
-        TypedNumber number = slot instanceof Slot.MeasureSlot ? entry.read(typed.get(), unit.get())
+        TypedNumber number = slot instanceof Slot.MeasureSlot ? entry.read(typed.get(), unit())
                 : entry.read(typed.get());
         if (number instanceof TypedNumber.Rejected rejected) {
             boolean halfway = rejected.reason() == TypedNumber.Reason.UNFINISHED;
@@ -539,7 +557,7 @@ public final class ZoneModel {
         note.set(Optional.empty());
         TypedNumber.Accepted accepted = (TypedNumber.Accepted) number;
         if (slot instanceof Slot.MeasureSlot measured) {
-            Quantity quantity = accepted.in(unit.get());
+            Quantity quantity = accepted.in(unit());
             return Optional.of(Branch.write(measured.markable() ? marked(slot, stamped(quantity)) : quantity));
         }
         return Optional.of(Node.number(accepted.value()));

@@ -22,6 +22,8 @@ import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import bedmark.survey.Survey;
 import bedmark.wording.Wording;
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -146,7 +148,8 @@ final class ZoneSketcher {
                         : wording.text("screen.picture.length-unknown"),
                 allowed.map(limit -> small(limit.overloaded().orElseThrow())).orElse(""),
                 wording.text("screen.picture.allowed"),
-                times -> wording.text("screen.picture.heights", wording.format().computed(times, 1)),
+                times -> wording.text("screen.picture.heights", wording.format().exact(
+                        new BigDecimal(times, new MathContext(2)).stripTrailingZeros())),
                 stations.isEmpty() ? Optional.of(wording.text("screen.picture.prompt")) : Optional.empty(),
                 spacing.isPresent() ? small(spacing.getAsDouble()) : wording.text("screen.picture.width-unknown"),
                 sectionTitle(stations), seals(zone.seals()));
@@ -171,6 +174,8 @@ final class ZoneSketcher {
 
     /** A depth or width as a bare number of the small unit; the picture's captions share one unit. */
     private String small(double metres) {
-        return wording.format().computed(metres, wording.units().smallLength());
+        Unit unit = wording.units().smallLength();
+        return unit == Unit.MILLIMETRE ? wording.format().computed(unit.fromSi(metres), 0)
+                : wording.format().computed(metres, unit);
     }
 }

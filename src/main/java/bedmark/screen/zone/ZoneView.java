@@ -43,6 +43,7 @@ import javafx.scene.control.Label;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** A transfer point: the form and its pad on one side, the zone picture and the verdict on the other. */
@@ -80,7 +81,7 @@ public final class ZoneView implements Screen {
         this.foot = footBar();
         compose();
         listening.onChange(model.surveyProperty(), survey -> refresh());
-        listening.onChange(model.activeProperty(), slot -> refresh());
+        listening.onChange(model.inHandProperty(), inHand -> refresh());
         listening.onChange(model.outcomeProperty(), outcome -> refresh());
         refresh();
     }
@@ -129,6 +130,7 @@ public final class ZoneView implements Screen {
     private VBox completedNote() {
         Label note = new Label(wording.text("screen.zone.completed"));
         note.setWrapText(true);
+        note.setMinHeight(Region.USE_PREF_SIZE);
         ActionButton correct = new ActionButton(Weight.PLAIN, wording.text("screen.zone.correct"), () ->
                 round.correct(model.history().survey().id(), wording.text("screen.zone.correct-why"),
                         row -> navigator.toZone(round, row)));
@@ -197,8 +199,8 @@ public final class ZoneView implements Screen {
     }
 
     private Optional<Integer> activeLine() {
-        Slot slot = model.activeProperty().get();
-        return slot != null && slot.field() instanceof StationsField && slot.where().tokens().size() > 3
+        Slot slot = model.active();
+        return slot.field() instanceof StationsField && slot.where().tokens().size() > 3
                 ? Optional.of(Integer.parseInt(slot.where().tokens().get(2))) : Optional.empty();
     }
 

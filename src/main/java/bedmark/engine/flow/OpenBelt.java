@@ -27,18 +27,29 @@ public final class OpenBelt {
     }
 
     /**
-     * S (m²).
+     * S, crown and trough together (m²).
      *
      * @param usableWidth b (m), positive
      * @param centreRoll  l3 (m)
      */
     public static Uncertain area(Uncertain usableWidth, Uncertain centreRoll, Uncertain troughAngle,
             Uncertain surchargeAngle) {
+        return crown(usableWidth, centreRoll, troughAngle, surchargeAngle)
+                .plus(trough(usableWidth, centreRoll, troughAngle));
+    }
+
+    /** S1, the parabola over the trough (m²). */
+    public static Uncertain crown(Uncertain usableWidth, Uncertain centreRoll, Uncertain troughAngle,
+            Uncertain surchargeAngle) {
         Uncertain centre = centreRoll.min(usableWidth);
-        Uncertain wings = usableWidth.minus(centre);
-        Uncertain cosine = troughAngle.cosine();
-        Uncertain crown = centre.plus(wings.times(cosine)).square().times(surchargeAngle.tangent()).over(6);
-        Uncertain wing = wings.over(2);
-        return crown.plus(centre.plus(wing.times(cosine)).times(wing).times(troughAngle.sine()));
+        return centre.plus(usableWidth.minus(centre).times(troughAngle.cosine())).square()
+                .times(surchargeAngle.tangent()).over(6);
+    }
+
+    /** S2, the trough (m²). */
+    public static Uncertain trough(Uncertain usableWidth, Uncertain centreRoll, Uncertain troughAngle) {
+        Uncertain centre = centreRoll.min(usableWidth);
+        Uncertain wing = usableWidth.minus(centre).over(2);
+        return centre.plus(wing.times(troughAngle.cosine())).times(wing).times(troughAngle.sine());
     }
 }

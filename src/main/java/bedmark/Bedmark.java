@@ -2,6 +2,8 @@ package bedmark;
 
 import bedmark.command.BedmarkCommand;
 import bedmark.command.Surroundings;
+import bedmark.index.Store;
+import bedmark.screen.BedmarkApp;
 import bedmark.words.Words;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
@@ -19,7 +21,19 @@ public final class Bedmark {
         Optional<Path> home = Optional.ofNullable(System.getProperty("bedmark.home")).map(Path::of);
         Surroundings surroundings = new Surroundings(new PrintWriter(System.out, true, StandardCharsets.UTF_8),
                 new PrintWriter(System.err, true, StandardCharsets.UTF_8), home, Clock.systemDefaultZone(),
-                new Words(Locale.ENGLISH), (store, demo) -> false);
+                new Words(Locale.ENGLISH), Bedmark::open);
         System.exit(BedmarkCommand.run(surroundings, arguments));
+    }
+
+    /** The window needs a display: on Linux an X or Wayland server that the environment names. */
+    private static boolean open(Path folder, Optional<Path> samples, boolean load) {
+        boolean linux = System.getProperty("os.name", "").toLowerCase(Locale.ROOT).contains("linux");
+        if (linux && System.getenv("DISPLAY") == null && System.getenv("WAYLAND_DISPLAY") == null) {
+            return false;
+        }
+        Clock clock = Clock.systemDefaultZone();
+        try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
+            return BedmarkApp.open(store, clock, samples, load);
+        }
     }
 }

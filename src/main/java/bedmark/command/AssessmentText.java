@@ -4,6 +4,7 @@ import bedmark.command.AssessCommand.Judged;
 import bedmark.document.Branch;
 import bedmark.form.FieldForm;
 import bedmark.form.Texts;
+import bedmark.json.FormReader;
 import bedmark.survey.Assessor.Assessed;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.Register;
@@ -13,6 +14,7 @@ import bedmark.wording.Telling;
 import bedmark.wording.Wording;
 import java.io.PrintWriter;
 import java.util.List;
+import java.util.Optional;
 
 /** Assessments as text for a person at a terminal: one block a survey. */
 final class AssessmentText {
@@ -61,7 +63,10 @@ final class AssessmentText {
                 + " > " + register.conveyorOf(transfer).tag() + (round.isEmpty() ? "" : "  [" + round + "]") + revision;
     }
 
+    /** The form that the survey was made with; a bundle that does not bring it is told without its labels. */
     private static FieldForm form(Survey survey, List<Branch> forms) {
-        return new FieldForm("none", 1, Texts.of("", ""), List.of());
+        Optional<String> id = survey.document().branch("form").flatMap(form -> form.text("id"));
+        return forms.stream().filter(form -> id.isPresent() && form.text("id").equals(id)).findFirst()
+                .map(FormReader::read).orElseGet(() -> new FieldForm("none", 1, Texts.of("", ""), List.of()));
     }
 }

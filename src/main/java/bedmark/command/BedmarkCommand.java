@@ -3,7 +3,6 @@ package bedmark.command;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
 import java.nio.file.Path;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -31,6 +30,14 @@ public final class BedmarkCommand implements Callable<Integer> {
         CommandLine line = new CommandLine(new BedmarkCommand(surroundings))
                 .addSubcommand(new OpenCommand(surroundings))
                 .addSubcommand(new AssessCommand(surroundings))
+                .addSubcommand(new CommandLine(new Group.PackGroup())
+                        .addSubcommand(new PackVerifyCommand(surroundings))
+                        .addSubcommand(new PackMakeCommand(surroundings)))
+                .addSubcommand(new CommandLine(new Group.FormsGroup())
+                        .addSubcommand(new FormsCheckCommand(surroundings)))
+                .addSubcommand(new CommandLine(new Group.StoreGroup())
+                        .addSubcommand(new StoreCheckCommand(surroundings))
+                        .addSubcommand(new StoreRebuildCommand(surroundings)))
                 .setOut(surroundings.out())
                 .setErr(surroundings.err())
                 .setParameterExceptionHandler(BedmarkCommand::badUse)
@@ -43,7 +50,7 @@ public final class BedmarkCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
-        return OpenCommand.open(surroundings, OpenCommand.ownStore(), Optional.empty());
+        return OpenCommand.open(surroundings, OpenCommand.ownStore(), false);
     }
 
     private static int badUse(ParameterException failure, String[] arguments) {

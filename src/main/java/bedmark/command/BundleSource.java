@@ -4,9 +4,13 @@ import static bedmark.command.BedmarkCommand.in;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
-import bedmark.json.JsonReader;
+import bedmark.json.BundleReader;
+import bedmark.pack.PackLimits;
+import bedmark.pack.PackReader;
+import bedmark.pack.Progress;
 import bedmark.survey.Bundle;
 import java.io.IOException;
+import java.io.InputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -57,7 +61,22 @@ final class BundleSource {
     }
 
     private static Named one(Path file) throws Exception {
+        InputFile.requireFile(file);
+        if (isArchive(file)) {
+            return in(file, () -> new Named(file,
+                    new PackReader(PackLimits.STANDARD, BundleReader::read).open(file, Progress.NONE).bundle()));
+        }
         byte[] bytes = InputFile.read(file);
-        return in(file, () -> new Named(file, new Bundle(JsonReader.read(bytes).root())));
+        return in(file, () -> new Named(file, BundleReader.read(bytes)));
+    }
+
+    /** Told by its first bytes, since a pack keeps its kind when its name is changed. */
+    private static boolean isArchive(Path file) {
+        try (InputStream stream = Files.newInputStream(file)) {
+            byte[] start = stream.readNBytes(2);
+            return start.length == 2 && start[0] == 'P' && start[1] == 'K';
+        } catch (IOException e) {
+            throw new Refused(Defect.in(file.toString(), "file-unreadable"), e);
+        }
     }
 }

@@ -2,6 +2,7 @@ package bedmark.command;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -12,14 +13,14 @@ import picocli.CommandLine.Option;
 @Command(name = "open", mixinStandardHelpOptions = true,
         description = "Opens the tablet app (the default without a command).")
 final class OpenCommand implements Callable<Integer> {
-    private static final String SAMPLE_ROUND = "sample-surveys/round-under-way.json";
+    private static final String SAMPLE_ROUND = "round-under-way.json";
 
     private final Surroundings surroundings;
 
     @Option(names = "--store", paramLabel = "DIR", description = "Folder of the store; made when it is not there.")
     private Optional<Path> store;
 
-    @Option(names = "--demo", description = "Fill an empty store with the demo plant.")
+    @Option(names = "--demo", description = "Load the demo plant at once where the store is empty.")
     private boolean demo;
 
     OpenCommand(Surroundings surroundings) {
@@ -28,30 +29,24 @@ final class OpenCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
-        return open(surroundings, store.orElseGet(OpenCommand::ownStore),
-                demo ? Optional.of(samples(surroundings)) : Optional.empty());
+        return open(surroundings, store.orElseGet(OpenCommand::ownStore), demo);
     }
 
-    static int open(Surroundings surroundings, Path store, Optional<Path> demo) throws Exception {
-        if (surroundings.opening().open(store, demo)) {
+    static int open(Surroundings surroundings, Path store, boolean demo) throws Exception {
+        Optional<Path> samples = surroundings.home().map(home -> home.resolve("sample-surveys"))
+                .filter(Files::isDirectory);
+        if (surroundings.opening().open(store, samples, demo)) {
             return ExitCode.FINE;
         }
         surroundings.out().println(surroundings.words().text("command.no-display"));
         surroundings.out().println();
-        new AssessCommand(surroundings).assess(home(surroundings).resolve(SAMPLE_ROUND));
+        new AssessCommand(surroundings).assess(samples.orElseThrow(() ->
+                new Refused(Defect.in("", "home-absent"))).resolve(SAMPLE_ROUND));
         return ExitCode.FINE;
     }
 
     /** Where a person's own surveys are kept unless they say otherwise. */
     static Path ownStore() {
         return Path.of(System.getProperty("user.home"), ".bedmark");
-    }
-
-    private static Path samples(Surroundings surroundings) {
-        return home(surroundings).resolve("sample-surveys");
-    }
-
-    private static Path home(Surroundings surroundings) {
-        return surroundings.home().orElseThrow(() -> new Refused(Defect.in("", "home-absent")));
     }
 }

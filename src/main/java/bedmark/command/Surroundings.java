@@ -32,10 +32,11 @@ public record Surroundings(PrintWriter out, PrintWriter err, Optional<Path> home
         /**
          * Opens the app.
          *
-         * @param store the store's folder
-         * @param demo  whether an empty store is filled with the demo plant of that folder
+         * @param store   the store's folder
+         * @param samples the folder of the demo plant, where it is laid out
+         * @param load    whether an empty store is filled with it at once
          * @return whether a window could be opened; without a display it could not
          */
-        boolean open(Path store, Optional<Path> demo);
+        boolean open(Path store, Optional<Path> samples, boolean load);
     }
 }

@@ -10,7 +10,6 @@ import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import java.math.BigDecimal;
 import java.util.Collections;
-import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -28,10 +27,6 @@ import java.util.Optional;
  */
 public record Measure(Dimension dimension, Unit metric, Unit us, Map<Unit, BigDecimal> steps,
                       Range<Quantity> plausible, Range<Quantity> possible) {
-
-    /** Orders quantities of one dimension by size, exactly, whatever their units. */
-    public static final Comparator<Quantity> BY_SIZE =
-            (one, other) -> one.value().compareTo(one.unit().convert(other.value(), other.unit()));
 
     public Measure {
         steps = Collections.unmodifiableMap(new LinkedHashMap<>(steps));
@@ -77,16 +72,16 @@ public record Measure(Dimension dimension, Unit metric, Unit us, Map<Unit, BigDe
     }
 
     private List<Judgement> judge(Pointer where, Quantity quantity, Optional<Quantity> last) {
-        if (possible.isUnder(quantity, BY_SIZE)) {
+        if (possible.isUnder(quantity, Quantity.BY_SIZE)) {
             return List.of(Judgement.refusal(where, possible.excluded() ? "not-above-possible" : "under-possible",
                     show(quantity), show(possible.low().orElseThrow())));
-        } else if (possible.isOver(quantity, BY_SIZE)) {
+        } else if (possible.isOver(quantity, Quantity.BY_SIZE)) {
             return List.of(Judgement.refusal(where, "over-possible", show(quantity),
                     show(possible.high().orElseThrow())));
-        } else if (plausible.isUnder(quantity, BY_SIZE)) {
+        } else if (plausible.isUnder(quantity, Quantity.BY_SIZE)) {
             return List.of(Judgement.doubt(where, "under-plausible", show(quantity),
                     show(plausible.low().orElseThrow())));
-        } else if (plausible.isOver(quantity, BY_SIZE)) {
+        } else if (plausible.isOver(quantity, Quantity.BY_SIZE)) {
             return List.of(Judgement.doubt(where, "over-plausible", show(quantity),
                     show(plausible.high().orElseThrow())));
         }

@@ -78,10 +78,10 @@ public record StationsField(Head head, List<Choice> methods, Measure position, M
 
     private static List<Judgement> judgePlace(Pointer where, Quantity place, Optional<Quantity> length,
                                               List<Quantity> seen) {
-        if (seen.stream().anyMatch(other -> Measure.BY_SIZE.compare(other, place) == 0)) {
+        if (seen.stream().anyMatch(other -> Quantity.BY_SIZE.compare(other, place) == 0)) {
             return List.of(Judgement.refusal(where, "station-twice", show(place)));
         }
-        return length.filter(end -> Measure.BY_SIZE.compare(place, end) > 0)
+        return length.filter(end -> Quantity.BY_SIZE.compare(place, end) > 0)
                 .map(end -> List.of(Judgement.refusal(where, "station-outside-zone", show(place), show(end))))
                 .orElse(List.of());
     }
@@ -89,7 +89,7 @@ public record StationsField(Head head, List<Choice> methods, Measure position, M
     private Optional<Node> depthAt(Quantity place, Branch last) {
         return stations(last).stream().filter(Branch.class::isInstance).map(Branch.class::cast)
                 .filter(station -> length(station.get("position"))
-                        .filter(at -> Measure.BY_SIZE.compare(at, place) == 0).isPresent())
+                        .filter(at -> Quantity.BY_SIZE.compare(at, place) == 0).isPresent())
                 .findFirst().flatMap(station -> station.get("depth"));
     }
 

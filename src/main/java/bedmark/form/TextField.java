@@ -10,13 +10,13 @@ import java.util.Optional;
  *
  * @param longest the most characters that the answer may have, at least 1
  * @param lines   whether the answer may have several lines
- * @param offers  where the field takes its suggestions from
+ * @param offers  what the answer is chosen from; typed freely where absent
  */
 public record TextField(Head head, int longest, boolean lines, Optional<Offer> offers) implements Field {
 
-    /** What can be suggested to the person. */
+    /** Things of the register that an answer is chosen from: the name is shown, the id is stored. */
     public enum Offer {
-        /** The plant's materials: the name is shown, the id is stored. */
+        /** The plant's materials. */
         MATERIALS
     }
 

@@ -1,20 +1,32 @@
 package bedmark.index;
 
 import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Node;
 import bedmark.document.Refused;
+import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
+import bedmark.journal.Journal;
 import bedmark.journal.NotSaved;
 import bedmark.journal.Progress;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.QueueState;
 import bedmark.survey.SurveyHistory;
+import java.io.ByteArrayInputStream;
+import java.io.Closeable;
+import java.io.IOException;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.UUID;
+import java.util.concurrent.CopyOnWriteArrayList;
+import java.util.concurrent.atomic.AtomicBoolean;
+import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.Consumer;
+import java.util.function.Function;
 
 /**
  * The store of one device, in one folder: {@code journal/} is the truth, {@code photos/} its files, {@code index/} a
@@ -22,7 +34,39 @@ import java.util.UUID;
  * called from any thread, interrupted or not; they wait for the store's own thread.
  */
 public final class Store implements AutoCloseable {
-    private Store() {
+    private static final String LOCK = "store.lock";
+
+    private final Path folder;
+    private final StoreOptions options;
+    private final Closeable lock;
+    private final Desk desk;
+    private final Desk photoDesk = new Desk("bedmark-photos");
+    private final PhotoShelf shelf;
+    private final Ledger ledger;
+    private final Device device;
+    private final List<StoreObserver> observers = new CopyOnWriteArrayList<>();
+    private final AtomicReference<Optional<OffsetDateTime>> savedAt;
+    private final AtomicBoolean closed = new AtomicBoolean();
+
+    private Store(Path folder, StoreOptions options, Closeable lock, Desk desk, boolean afresh) throws IOException {
+        this.folder = folder;
+        this.options = options;
+        this.lock = lock;
+        this.desk = desk;
+        this.shelf = new PhotoShelf(folder, options.files());
+        shelf.open();
+        this.ledger = Ledger.open(folder, options, afresh);
+        try {
+            Optional<Entry> newest = ledger.newest();
+            this.savedAt = new AtomicReference<>(newest.map(Entry::at));
+            DeviceFile file = new DeviceFile(folder, options.files());
+            Optional<Device> known = file.read();
+            this.device = known.isPresent() ? known.get()
+                    : file.write(newest.map(Entry::device), options.deviceName());
+        } catch (IOException | RuntimeException e) {
+            ledger.close();
+            throw e;
+        }
     }
 
     /**
@@ -32,7 +76,36 @@ public final class Store implements AutoCloseable {
      *                 be used
      */
     public static Store open(Path folder, StoreOptions options) {
-        throw new UnsupportedOperationException();
+        return open(folder, options, false);
+    }
+
+    private static Store open(Path folder, StoreOptions options, boolean afresh) {
+        Path home = folder.toAbsolutePath().normalize();
+        Database.requireFit(home);
+        Desk desk = new Desk("bedmark-store");
+        try {
+            return desk.call(() -> openLocked(home, options, desk, afresh));
+        } catch (RuntimeException e) {
+            desk.close();
+            throw e;
+        }
+    }
+
+    private static Store openLocked(Path folder, StoreOptions options, Desk desk, boolean afresh) {
+        FileLayer files = options.files();
+        try {
+            files.createFolder(folder);
+            Closeable lock = files.lock(folder.resolve(LOCK))
+                    .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
+            try {
+                return new Store(folder, options, lock, desk, afresh);
+            } catch (IOException | RuntimeException e) {
+                lock.close();
+                throw e;
+            }
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("store", e, files, folder), e);
+        }
     }
 
     /**
@@ -41,7 +114,12 @@ public final class Store implements AutoCloseable {
      * @throws Refused {@code store-missing} where the folder holds no store
      */
     public static StoreCheck check(Path folder, FileLayer files, Progress progress) {
-        throw new UnsupportedOperationException();
+        Path home = requireStore(folder, files);
+        Database.requireFit(home);
+        Desk desk = new Desk("bedmark-check");
+        try (desk) {
+            return desk.call(() -> StoreProof.ofClosed(home, files, progress));
+        }
     }
 
     /**
@@ -51,20 +129,31 @@ public final class Store implements AutoCloseable {
      * @throws Refused as {@link #open(Path, StoreOptions)}; {@code store-missing} where the folder holds no store
      */
     public static long rebuild(Path folder, StoreOptions options) {
-        throw new UnsupportedOperationException();
+        Path home = requireStore(folder, options.files());
+        try (Store store = open(home, options, true)) {
+            return store.opening().replayed();
+        }
+    }
+
+    private static Path requireStore(Path folder, FileLayer files) {
+        Path home = folder.toAbsolutePath().normalize();
+        if (!files.exists(home.resolve(Ledger.JOURNAL))) {
+            throw new Refused(Defect.in(folder.toString(), "store-missing"));
+        }
+        return home;
     }
 
     public Path folder() {
-        throw new UnsupportedOperationException();
+        return folder;
     }
 
     public Device device() {
-        throw new UnsupportedOperationException();
+        return device;
     }
 
-    /** What opening found and did. */
+    /** What opening found and did, and what has been found since. */
     public Opening opening() {
-        throw new UnsupportedOperationException();
+        return desk.call(ledger::opening);
     }
 
     /**
@@ -73,11 +162,37 @@ public final class Store implements AutoCloseable {
      * @param person who did it
      * @return the entry with its sequence number and time
      * @throws NotSaved where it is not on the medium
-     * @throws Refused  {@code survey-unknown}, {@code survey-known}, {@code act-unfit} where the act is impossible as
-     *                  things stand; nothing was written
+     * @throws Refused  {@code survey-unknown}, {@code survey-known}, {@code act-unfit}, {@code revision-unfit},
+     *                  {@code act-without-survey}, {@code entry-too-large}, or what is wrong in a document: the act
+     *                  is impossible as things stand, and nothing was written
      */
     public Entry append(String person, Act act) {
-        throw new UnsupportedOperationException();
+        AtomicReference<Optional<Journal.Saved>> saved = new AtomicReference<>(Optional.empty());
+        try {
+            Entry entry = desk.callThen(() -> {
+                Journal.Saved done = ledger.save(OffsetDateTime.now(options.clock()), person, device.id(), act);
+                savedAt.set(Optional.of(OffsetDateTime.now(options.clock())));
+                saved.set(Optional.of(done));
+                return done.entry();
+            }, () -> saved.get().ifPresent(ledger::index));
+            tell(observer -> observer.saved(entry));
+            return entry;
+        } catch (NotSaved e) {
+            tell(observer -> observer.notSaved(e));
+            throw e;
+        }
+    }
+
+    /** An observer that fails can't make a saved entry look as if it were not. */
+    private void tell(Consumer<StoreObserver> news) {
+        for (StoreObserver observer : observers) {
+            try {
+                news.accept(observer);
+            } catch (RuntimeException e) {
+                Thread current = Thread.currentThread();
+                current.getUncaughtExceptionHandler().uncaughtException(current, e);
+            }
+        }
     }
 
     /**
@@ -89,96 +204,160 @@ public final class Store implements AutoCloseable {
      * @throws Refused  {@code photo-unreadable}, {@code photo-unfit}, and those of {@link #append(String, Act)}
      */
     public Entry attachPhoto(Path source, UUID survey, String person, OffsetDateTime takenAt, String caption) {
-        throw new UnsupportedOperationException();
+        return attach(keepPhoto(source), survey, person, takenAt, caption);
     }
 
     /** As {@link #attachPhoto(Path, UUID, String, OffsetDateTime, String)}, from memory. */
     public Entry attachPhoto(byte[] photo, UUID survey, String person, OffsetDateTime takenAt, String caption) {
-        throw new UnsupportedOperationException();
+        return attach(keep(() -> shelf.keep(new ByteArrayInputStream(photo), "")), survey, person, takenAt, caption);
     }
 
-    /** Where the file of a photo of a survey lies. */
-    public Path photoFile(Branch photo) {
-        throw new UnsupportedOperationException();
+    private Entry attach(Branch kept, UUID survey, String person, OffsetDateTime takenAt, String caption) {
+        Branch photo = Branch.EMPTY.with("id", UUID.randomUUID().toString());
+        for (Map.Entry<String, Node> member : kept.members().entrySet()) {
+            photo = photo.with(member.getKey(), member.getValue());
+        }
+        photo = photo.with("takenAt", takenAt.toString());
+        return append(person, new Act.PhotoAttached(survey, caption.isBlank() ? photo
+                : photo.with("caption", caption)));
+    }
+
+    /**
+     * Copies a photo into the store without telling of it: for a survey that is taken in whole afterwards.
+     *
+     * @return {@code file}, {@code sha256} and {@code bytes} as in a survey's document
+     * @throws NotSaved where it is not on the medium
+     * @throws Refused  {@code photo-unreadable}, {@code photo-unfit}
+     */
+    public Branch keepPhoto(Path source) {
+        return keep(() -> shelf.keep(source));
+    }
+
+    /** A copy onto the shelf. */
+    @FunctionalInterface
+    private interface Copy {
+        Branch make() throws IOException;
+    }
+
+    private Branch keep(Copy copy) {
+        try {
+            return photoDesk.call(() -> {
+                try {
+                    return copy.make();
+                } catch (IOException e) {
+                    long safe = desk.call(ledger::last);
+                    throw new NotSaved(Fault.defect("not-saved", e, options.files(), shelf.folder(),
+                            Long.toString(safe)), safe, e);
+                }
+            });
+        } catch (NotSaved e) {
+            tell(observer -> observer.notSaved(e));
+            throw e;
+        }
+    }
+
+    /** Where the file of a photo of a survey lies; nothing where its document names none of this store. */
+    public Optional<Path> photoFile(Branch photo) {
+        return shelf.file(photo);
     }
 
     /** The latest register: {@code plant}, {@code forms}, {@code rounds}. */
     public Optional<Branch> register() {
-        throw new UnsupportedOperationException();
+        return desk.call(ledger::register);
     }
 
     /** A survey as it stands, with every change, read from the journal. */
     public Optional<SurveyHistory> history(UUID survey) {
-        throw new UnsupportedOperationException();
+        return index(index -> index.folded(survey).history());
     }
 
     /** The surveys that a query asks for, in the order in which they were opened. */
     public List<SurveyLine> surveys(SurveyQuery query) {
-        throw new UnsupportedOperationException();
+        return ask(queries -> queries.surveys(query));
     }
 
     public Optional<SurveyLine> survey(UUID id) {
-        throw new UnsupportedOperationException();
+        return ask(queries -> queries.row(id).map(SurveyRow::line));
     }
 
     /** The current surveys of a round that are not completed. */
     public List<SurveyLine> open(String round) {
-        throw new UnsupportedOperationException();
+        return surveys(SurveyQuery.ALL.ofRound(round).in(QueueState.OPEN).current());
     }
 
     /**
      * The last result of a transfer point: the inspected survey that was completed last and that no completed
      * revision replaces.
      *
-     * @param before leaves out this survey and what was completed after it
+     * @param before leaves out this survey, what it corrects, and what was completed after it
      */
     public Optional<Branch> latestFinished(String transfer, Optional<UUID> before) {
-        throw new UnsupportedOperationException();
+        return index(index -> new Queries(index).latestFinished(transfer, before)
+                .flatMap(id -> index.folded(id).history()).map(history -> history.survey().document()));
     }
 
     /** How many surveys are in each state; every state has a number. */
     public Map<QueueState, Long> counts() {
-        throw new UnsupportedOperationException();
+        return ask(Queries::counts);
     }
 
     /** The surveys that wait for export, in the order in which they were opened. */
     public List<SurveyLine> queue() {
-        throw new UnsupportedOperationException();
+        return surveys(SurveyQuery.ALL.in(QueueState.QUEUED));
     }
 
     /** The newest walk of a round. */
     public Optional<Walk> walk(String round) {
-        throw new UnsupportedOperationException();
+        return ask(queries -> queries.walk(round));
     }
 
     /** The newest walk of each round, the one started last first. */
     public List<Walk> walks() {
-        throw new UnsupportedOperationException();
+        return ask(Queries::walks);
     }
 
     /** The packs that left, newest first. */
     public List<Export> exports() {
-        throw new UnsupportedOperationException();
+        return ask(Queries::exports);
+    }
+
+    private <T> T ask(Function<Queries, T> question) {
+        return index(index -> question.apply(new Queries(index)));
+    }
+
+    private <T> T index(Function<Index, T> question) {
+        return desk.call(() -> ledger.ask(question));
     }
 
     /** When an entry was last forced to the medium; after opening, the time of the last entry. */
     public Optional<OffsetDateTime> savedAt() {
-        throw new UnsupportedOperationException();
+        return savedAt.get();
     }
 
     /** Adds an observer until the returned handle is run. */
     public Runnable observe(StoreObserver observer) {
-        throw new UnsupportedOperationException();
+        observers.add(observer);
+        return () -> observers.remove(observer);
     }
 
     /** Proves the whole store in the calling thread, while others go on saving. */
     public StoreCheck check(Progress progress) {
-        throw new UnsupportedOperationException();
+        return StoreProof.ofOpen(folder, options.files(), progress, desk, ledger);
     }
 
     /** Waits for what was begun, closes the index cleanly and gives the lock up. Closing again does nothing. */
     @Override
     public void close() {
-        throw new UnsupportedOperationException();
+        if (closed.getAndSet(true)) {
+            return;
+        }
+        photoDesk.call(() -> true);
+        photoDesk.close();
+        desk.call(() -> {
+            ledger.close();
+            lock.close();
+            return true;
+        });
+        desk.close();
     }
 }

@@ -1,7 +1,9 @@
 package bedmark.json;
 
 import bedmark.document.Branch;
+import bedmark.document.Defect;
 import bedmark.document.Pointer;
+import java.util.Comparator;
 import java.util.Map;
 import java.util.Optional;
 
@@ -29,5 +31,24 @@ public record Document(Branch root, Map<Pointer, Place> places) {
             }
         }
         return Optional.empty();
+    }
+
+    /** The same defect with the line and column of its place: {@code /surveys/0/id (12:5)}. */
+    public Defect placed(Defect defect) {
+        return placeOf(pointer(defect))
+                .map(place -> new Defect(defect.code(), (defect.where() + " (" + place.line() + ":" + place.column()
+                        + ")").strip(), defect.details()))
+                .orElse(defect);
+    }
+
+    /** Defects of this document as a person meets them who reads its text from the top. */
+    Comparator<Defect> inTextOrder() {
+        return Comparator.<Defect>comparingInt(defect -> placeOf(pointer(defect)).map(Place::line).orElse(0))
+                .thenComparingInt(defect -> placeOf(pointer(defect)).map(Place::column).orElse(0))
+                .thenComparing(Defect::where).thenComparing(Defect::code);
+    }
+
+    private static Pointer pointer(Defect defect) {
+        return Pointer.parse(defect.where());
     }
 }

@@ -33,6 +33,7 @@ public final class JsonReader {
     private static final int DEEPEST = 64;
     private static final int LONGEST_NUMBER = 100;
     private static final int LARGEST_EXPONENT = 100;
+    private static final String OUT_OF_SIZE = "a number is too large or too small: ";
     private static final JsonFactory FACTORY = JsonFactory.builder()
             .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
             .disable(StreamReadFeature.INCLUDE_SOURCE_IN_LOCATION)
@@ -119,11 +120,15 @@ public final class JsonReader {
     }
 
     private BigDecimal decimal() throws IOException {
-        BigDecimal number = new BigDecimal(parser.getText());
-        if (Math.abs((long) number.scale()) > LARGEST_EXPONENT) {
-            throw refused("a number is too large or too small: " + parser.getText());
+        try {
+            BigDecimal number = new BigDecimal(parser.getText());
+            if (Math.abs((long) number.scale()) <= LARGEST_EXPONENT) {
+                return number;
+            }
+        } catch (NumberFormatException e) {
+            throw new Refused(refused(OUT_OF_SIZE + parser.getText()).defect(), e);
         }
-        return number;
+        throw refused(OUT_OF_SIZE + parser.getText());
     }
 
     /** Escapes can smuggle half a surrogate pair into a text, which no file could then hold. */

@@ -1,5 +1,9 @@
 package bedmark.quantity;
 
+import java.util.Locale;
+import java.util.Optional;
+import java.util.stream.Stream;
+
 /** The kind of quantity that a {@link Unit} measures; only units of one dimension convert into each other. */
 public enum Dimension {
     /** SI unit m. */
@@ -23,5 +27,14 @@ public enum Dimension {
     /** SI unit N/m. */
     LINE_FORCE,
     /** SI unit 1/s. */
-    FREQUENCY
+    FREQUENCY;
+
+    /** The word used in form files. */
+    public String code() {
+        return name().toLowerCase(Locale.ROOT).replace('_', '-');
+    }
+
+    public static Optional<Dimension> ofCode(String code) {
+        return Stream.of(values()).filter(dimension -> dimension.code().equals(code)).findFirst();
+    }
 }

@@ -2,6 +2,7 @@ package bedmark.quantity;
 
 import java.math.BigDecimal;
 import java.time.OffsetDateTime;
+import java.util.Comparator;
 import java.util.Objects;
 import java.util.Optional;
 
@@ -19,6 +20,10 @@ import java.util.Optional;
 public record Quantity(BigDecimal value, Unit unit, Optional<String> entered,
                        Optional<BigDecimal> standardUncertainty, Optional<Quality> quality,
                        Optional<OffsetDateTime> at, Optional<BeltState> beltState) {
+
+    /** Orders quantities of one dimension by size, exactly, whatever their units. */
+    public static final Comparator<Quantity> BY_SIZE =
+            (one, other) -> one.value.compareTo(one.unit.convert(other.value, other.unit));
 
     public Quantity {
         Objects.requireNonNull(value);

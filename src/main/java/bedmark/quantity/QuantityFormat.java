@@ -72,6 +72,9 @@ public final class QuantityFormat {
     }
 
     private String rounded(BigDecimal number, int mostDecimals) {
+        if (number.signum() == 0) {
+            return "0";
+        }
         BigDecimal significant = number.round(new MathContext(SIGNIFICANT, RoundingMode.HALF_EVEN));
         int whole = significant.precision() - significant.scale();
         int decimals = Math.max(0, Math.min(mostDecimals, SIGNIFICANT - Math.max(whole, 0)));

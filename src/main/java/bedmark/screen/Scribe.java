@@ -62,6 +62,11 @@ public final class Scribe implements AutoCloseable {
         });
     }
 
+    /** Shows trouble that came from elsewhere, until the next act is saved. */
+    void report(Defect defect) {
+        trouble.set(Optional.of(defect));
+    }
+
     /** Tries once more to save what waits. */
     public void retry() {
         pen.execute(this::writeAll);

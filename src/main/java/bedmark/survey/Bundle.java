@@ -27,9 +27,9 @@ public record Bundle(Branch document) {
         if (!FORMAT.equals(format)) {
             throw new Refused(Defect.at(Pointer.of("format"), "format-unknown", format, FORMAT));
         }
-        int version = document.number("version").map(BigDecimal::intValue).orElse(0);
-        if (version != VERSION) {
-            throw new Refused(Defect.at(Pointer.of("version"), "version-unknown", Integer.toString(version),
+        BigDecimal version = document.number("version").orElse(BigDecimal.ZERO);
+        if (version.compareTo(BigDecimal.valueOf(VERSION)) != 0) {
+            throw new Refused(Defect.at(Pointer.of("version"), "version-unknown", version.toPlainString(),
                     Integer.toString(VERSION)));
         }
         Register register = register(document);

@@ -27,7 +27,8 @@ import java.util.function.Function;
 
 /**
  * What a site decided, read from its register: {@code limits}, {@code sealRates}, {@code instruments} and
- * {@code method} of the plant. What it leaves out keeps the default of the engineering page.
+ * {@code method} of the plant. What it leaves out keeps the default of the engineering page; a limit of a rule that
+ * this version does not know is kept in the document and not used.
  */
 final class SiteSettings {
     private static final String LIMITS = "limits";
@@ -44,8 +45,8 @@ final class SiteSettings {
      */
     static Settings of(Branch plant) {
         try {
-            Settings settings = Settings.standard().with(limits(plant)).with(certainty(plant))
-                    .with(sealRates(plant)).with(instruments(plant));
+            Settings settings = grips(plant, Settings.standard().with(limits(plant)).with(certainty(plant))
+                    .with(sealRates(plant)).with(instruments(plant)));
             return plant.text("method").map(code -> settings.with(
                     word(DragMethod::ofCode, code, Pointer.of("method")))).orElse(settings);
         } catch (ImpossibleReading e) {
@@ -58,11 +59,12 @@ final class SiteSettings {
         Branch rows = plant.branch(LIMITS).orElse(Branch.EMPTY);
         Limits limits = Limits.standard();
         for (String code : rows.members().keySet()) {
-            if (code.equals(CERTAINTY)) {
+            Optional<Rule> named = Rule.ofCode(code);
+            if (named.isEmpty()) {
                 continue;
             }
             Pointer place = Pointer.of(LIMITS, code);
-            Rule rule = word(Rule::ofCode, code, place);
+            Rule rule = named.get();
             Branch row = below(place, () -> rows.branch(code).orElse(Branch.EMPTY));
             Limit known = rule.limit();
             OptionalDouble near = below(place, () -> number(row, "near", known.near()));
@@ -73,6 +75,16 @@ final class SiteSettings {
             limits = limits.with(rule, enabled ? limit : limit.off());
         }
         return limits;
+    }
+
+    /** The two friction factors of ISO 5048; one that the site set is taken as it stands. */
+    private static Settings grips(Branch plant, Settings settings) {
+        Branch rows = plant.branch(LIMITS).orElse(Branch.EMPTY);
+        Optional<Double> onBelt = below(Pointer.of(LIMITS), () -> number(rows, "beltGrip"));
+        Optional<Double> onBoards = below(Pointer.of(LIMITS), () -> number(rows, "boardGrip"));
+        return onBelt.isEmpty() && onBoards.isEmpty() ? settings
+                : settings.withGrip(onBelt.orElse(settings.beltGrip().value()),
+                        onBoards.orElse(settings.boardGrip().value()));
     }
 
     private static Certainty certainty(Branch plant) {

@@ -5,6 +5,7 @@ import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
+import bedmark.engine.Assumption;
 import bedmark.form.Field;
 import bedmark.form.FieldForm;
 import bedmark.form.Judgement;
@@ -62,7 +63,8 @@ public record Wording(Words words, UnitSystem units) {
         for (int i = 0; i < defect.details().size(); i++) {
             arguments[i + 1] = defect.details().get(i);
         }
-        return text("defect." + defect.code(), arguments);
+        // What the input brought along may hold line ends; a refusal is one line.
+        return text("defect." + defect.code(), arguments).replaceAll("\\R", " ");
     }
 
     /** A judgement in one sentence. */
@@ -94,6 +96,23 @@ public record Wording(Words words, UnitSystem units) {
             }
         }
         return String.valueOf(node);
+    }
+
+    /** Something that was taken for granted, in one sentence. */
+    public String assumption(Assumption assumption, FieldForm form) {
+        Object[] arguments = assumption.arguments().stream()
+                .map(argument -> argument.startsWith("/") ? reading(argument, form) : spoken(argument)).toArray();
+        return text("assumption." + assumption.code(), arguments);
+    }
+
+    /** An argument of the engine for people: a number in the locale's form, a code in words. */
+    private String spoken(String argument) {
+        try {
+            return format().computed(Double.parseDouble(argument), 3);
+        } catch (NumberFormatException e) {
+            String key = "assumption.word." + argument;
+            return words.has(key) ? text(key) : argument;
+        }
     }
 
     /**

@@ -13,13 +13,17 @@ import bedmark.quantity.BeltState;
 import bedmark.quantity.NumberEntry;
 import bedmark.quantity.Quality;
 import bedmark.quantity.Quantity;
+import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.TypedNumber;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
+import bedmark.survey.QueueState;
 import bedmark.survey.Survey;
 import bedmark.survey.SurveyHistory;
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.time.OffsetDateTime;
 import java.time.temporal.ChronoUnit;
 import java.util.Comparator;
@@ -252,7 +256,7 @@ public final class ZoneModel {
      */
     public boolean keep() {
         Slot slot = active.get();
-        if (slot == null || typed.get().isEmpty()) {
+        if (slot == null || typed.get().isEmpty() || !open()) {
             return true;
         }
         Optional<Node> answer = typedAnswer(slot);
@@ -277,6 +281,52 @@ public final class ZoneModel {
         note.set(firstJudgement(slot));
     }
 
+    /** What stands in the active cell, as the pad edits it: the locale's decimal sign, no other signs. */
+    public String editable() {
+        if (!typed.get().isEmpty()) {
+            return typed.get();
+        }
+        char sign = new QuantityFormat(locale.get()).decimalSign();
+        return answer(active.get()).map(node -> {
+            if (node instanceof Branch) {
+                return quantity(saved.get(), active.get().where()).map(read -> inUnit(read, sign)).orElse("");
+            }
+            return node instanceof Node.Decimal number ? number.value().toPlainString().replace('.', sign)
+                    : node instanceof Node.Text text ? text.value() : "";
+        }).orElse("");
+    }
+
+    private String inUnit(Quantity read, char sign) {
+        if (read.unit() == unit.get()) {
+            return read.entered().orElseGet(() -> read.value().toPlainString().replace('.', sign));
+        }
+        return unit.get().convert(read.value(), read.unit()).round(new MathContext(4)).stripTrailingZeros()
+                .toPlainString().replace('.', sign);
+    }
+
+    /** Changes the number in the active cell by one step of its unit. */
+    public void step(int direction) {
+        Slot slot = active.get();
+        BigDecimal step = slot instanceof Slot.MeasureSlot measured ? measured.measure().step(unit.get())
+                : slot instanceof Slot.CountSlot counted ? counted.count().step() : BigDecimal.ZERO;
+        String now = editable();
+        TypedNumber number = new NumberEntry(locale.get()).read(now.isEmpty() ? "0" : now);
+        if (number instanceof TypedNumber.Accepted accepted) {
+            BigDecimal stepped = accepted.value().add(step.multiply(BigDecimal.valueOf(direction)))
+                    .max(BigDecimal.ZERO);
+            char sign = new QuantityFormat(locale.get()).decimalSign();
+            typed.set(stepped.toPlainString().replace('.', sign));
+        }
+    }
+
+    /** Goes on to the next unit that the active cell can be typed in; what is typed is not converted. */
+    public void switchUnit() {
+        if (active.get() instanceof Slot.MeasureSlot measured) {
+            List<Unit> offered = measured.measure().units();
+            chooseUnit(offered.get((offered.indexOf(unit.get()) + 1) % offered.size()));
+        }
+    }
+
     /** Clears the active cell. */
     public void clear() {
         typed.set("");
@@ -289,12 +339,17 @@ public final class ZoneModel {
     }
 
     private void save(Answers.Change change) {
-        if (saved.get().at(change.where()).equals(change.answer())) {
+        if (!open() || saved.get().at(change.where()).equals(change.answer())) {
             return;
         }
         saved.set(change.in(saved.get()));
         act(new Act.AnswerSet(id, change.where(), change.answer()));
         refresh();
+    }
+
+    /** Whether the survey still takes answers; a completed one is corrected by a new revision. */
+    public boolean open() {
+        return history.state() == QueueState.OPEN;
     }
 
     private void act(Act act) {
@@ -356,13 +411,22 @@ public final class ZoneModel {
      */
     public void pull(int line, Quantity position, Quantity depth) {
         Pointer table = Survey.READINGS.child(StationsField.KEY);
-        Pointer place = table.child(line);
-        Branch seen = Branch.write(stamped(depth).withQuality(Quality.ESTIMATED));
         typed.set("");
-        save(saved.get().at(place).isPresent()
-                ? Answers.change(saved.get(), place.child("depth"), Optional.of(seen))
-                : Answers.withLine(saved.get(), table, Branch.EMPTY.with("position", position).with("depth", seen)));
-        activate(place.child("depth"));
+        save(pulled(line, position, depth));
+        activate(table.child(line).child("depth"));
+    }
+
+    /** The survey as it would be with the bed pulled to a depth; nothing is saved. */
+    public Branch previewPull(int line, Quantity position, Quantity depth) {
+        return pulled(line, position, depth).in(saved.get());
+    }
+
+    private Answers.Change pulled(int line, Quantity position, Quantity depth) {
+        Pointer table = Survey.READINGS.child(StationsField.KEY);
+        Branch seen = Branch.write(stamped(depth).withQuality(Quality.ESTIMATED));
+        return saved.get().at(table.child(line)).isPresent()
+                ? Answers.change(saved.get(), table.child(line).child("depth"), Optional.of(seen))
+                : Answers.withLine(saved.get(), table, Branch.EMPTY.with("position", position).with("depth", seen));
     }
 
     private void chooseWay(SpeedField field, Optional<Node> answer) {

@@ -1,0 +1,34 @@
+package bedmark.command;
+
+import bedmark.index.Store;
+import bedmark.index.StoreOptions;
+import bedmark.survey.LevelWord;
+import java.nio.file.Path;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Parameters;
+
+/** Throws a store's index away and makes it anew from the journal. */
+@Command(name = "rebuild", mixinStandardHelpOptions = true,
+        description = "Makes a store's database anew from its journal; the journal itself is never touched.")
+final class StoreRebuildCommand implements Callable<Integer> {
+    private final Surroundings surroundings;
+
+    @Parameters(paramLabel = "DIR", description = "The store's folder.")
+    private Path folder;
+
+    StoreRebuildCommand(Surroundings surroundings) {
+        this.surroundings = surroundings;
+    }
+
+    @Override
+    public Integer call() {
+        long entries;
+        try (ProgressLine progress = new ProgressLine(surroundings)) {
+            entries = Store.rebuild(folder, StoreOptions.of("").withClock(surroundings.clock())
+                    .withLevels(new LevelWord()::of).withProgress(progress::at));
+        }
+        surroundings.out().println(surroundings.words().text("command.store.rebuilt", folder, entries));
+        return ExitCode.FINE;
+    }
+}

@@ -1,0 +1,192 @@
+package bedmark.index;
+
+import bedmark.document.Defect;
+import bedmark.document.Refused;
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.sql.Connection;
+import java.sql.PreparedStatement;
+import java.sql.ResultSet;
+import java.sql.SQLException;
+import java.sql.Statement;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Properties;
+import org.h2.Driver;
+import org.h2.api.ErrorCode;
+
+/**
+ * One H2 database with one connection, used by one thread that is never interrupted: an interrupted thread would close
+ * the whole database. Every failure is an {@link IndexBroken}.
+ */
+final class Database implements AutoCloseable {
+
+    /** The name of the database's files, without their ending. */
+    static final String NAME = "bedmark";
+    private static final String FILE = "jdbc:h2:file:";
+    private static final String MEMORY = "jdbc:h2:mem:";
+    private static final String SETTINGS = ";WRITE_DELAY=0;DB_CLOSE_ON_EXIT=FALSE;TRACE_LEVEL_FILE=0";
+    private static final String READ_ONLY = ";ACCESS_MODE_DATA=r;IFEXISTS=TRUE";
+    private static final String SCHEMA = "schema.sql";
+
+    private final Connection connection;
+    private final Map<String, PreparedStatement> statements = new HashMap<>();
+
+    private Database(Connection connection) {
+        this.connection = connection;
+    }
+
+    /** Reads a row. */
+    @FunctionalInterface
+    interface RowReader<T> {
+        T read(ResultSet row) throws SQLException;
+    }
+
+    /**
+     * Opens the database of a folder, and makes an empty one where there is none.
+     *
+     * @throws Refused {@code store-locked} where another program has it open
+     */
+    static Database open(Path folder) {
+        return connect(FILE + path(folder) + SETTINGS, folder);
+    }
+
+    /** Opens the database of a folder without writing a byte. */
+    static Database openToRead(Path folder) {
+        return connect(FILE + path(folder) + SETTINGS + READ_ONLY, folder);
+    }
+
+    /** An empty database that ends with the program, for when the disk takes none. */
+    static Database inMemory() {
+        return connect(MEMORY + SETTINGS, Path.of(""));
+    }
+
+    /**
+     * Refuses a folder whose path would be read as database settings.
+     *
+     * @throws Refused {@code store-folder-unfit}
+     */
+    static void requireFit(Path folder) {
+        path(folder);
+    }
+
+    private static String path(Path folder) {
+        String path = folder.toAbsolutePath().normalize().resolve(NAME).toString();
+        if (path.contains(";")) {
+            throw new Refused(Defect.in(folder.toString(), "store-folder-unfit", ";"));
+        }
+        return path;
+    }
+
+    private static Database connect(String url, Path folder) {
+        Properties person = new Properties();
+        person.setProperty("user", "");
+        person.setProperty("password", "");
+        try {
+            Connection connection = new Driver().connect(url, person);
+            connection.setAutoCommit(false);
+            return new Database(connection);
+        } catch (SQLException e) {
+            if (e.getErrorCode() == ErrorCode.DATABASE_ALREADY_OPEN_1) {
+                throw new Refused(Defect.in(folder.toString(), "store-locked"), e);
+            }
+            throw new IndexBroken(e);
+        } catch (RuntimeException | OutOfMemoryError | StackOverflowError e) {
+            // A damaged file makes the database fail in ways that it does not wrap.
+            throw new IndexBroken(e);
+        }
+    }
+
+    /** Makes the tables. */
+    void layOut() {
+        try (InputStream schema = Database.class.getResourceAsStream(SCHEMA);
+             Statement statement = connection.createStatement()) {
+            String text = new String(schema.readAllBytes(), StandardCharsets.UTF_8).replaceAll("(?m)^--.*$", "");
+            for (String command : text.split(";")) {
+                if (!command.isBlank()) {
+                    statement.execute(command);
+                }
+            }
+            connection.commit();
+        } catch (SQLException e) {
+            throw new IndexBroken(e);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    <T> List<T> rows(String sql, RowReader<T> reader, Object... arguments) {
+        try {
+            PreparedStatement statement = prepared(sql, arguments);
+            List<T> rows = new ArrayList<>();
+            try (ResultSet result = statement.executeQuery()) {
+                while (result.next()) {
+                    rows.add(reader.read(result));
+                }
+            }
+            return rows;
+        } catch (SQLException e) {
+            throw new IndexBroken(e);
+        }
+    }
+
+    void run(String sql, Object... arguments) {
+        try {
+            prepared(sql, arguments).executeUpdate();
+        } catch (SQLException e) {
+            throw new IndexBroken(e);
+        }
+    }
+
+    /** Takes a row into the statement's batch. */
+    void batch(String sql, Object... arguments) {
+        try {
+            prepared(sql, arguments).addBatch();
+        } catch (SQLException e) {
+            throw new IndexBroken(e);
+        }
+    }
+
+    void runBatch(String sql) {
+        try {
+            prepared(sql).executeBatch();
+        } catch (SQLException e) {
+            throw new IndexBroken(e);
+        }
+    }
+
+    void commit() {
+        try {
+            connection.commit();
+        } catch (SQLException e) {
+            throw new IndexBroken(e);
+        }
+    }
+
+    private PreparedStatement prepared(String sql, Object... arguments) throws SQLException {
+        PreparedStatement statement = statements.get(sql);
+        if (statement == null) {
+            statement = connection.prepareStatement(sql);
+            statements.put(sql, statement);
+        }
+        for (int i = 0; i < arguments.length; i++) {
+            statement.setObject(i + 1, arguments[i]);
+        }
+        return statement;
+    }
+
+    /** Closes cleanly; a database that can't be closed is noticed when it is opened. */
+    @Override
+    public void close() {
+        try {
+            connection.close();
+        } catch (SQLException e) {
+            throw new IndexBroken(e);
+        }
+    }
+}

@@ -1,0 +1,75 @@
+package bedmark.index;
+
+import java.util.concurrent.Callable;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.FutureTask;
+import java.util.concurrent.RejectedExecutionException;
+
+/**
+ * One thread that does all work of its kind in order and is never interrupted: an interrupted thread closes the files
+ * and the database that it is busy with. Whoever waits may be interrupted; the work is done all the same.
+ */
+final class Desk implements AutoCloseable {
+    private final ExecutorService thread;
+
+    Desk(String name) {
+        thread = Executors.newSingleThreadExecutor(work -> {
+            Thread one = new Thread(work, name);
+            one.setDaemon(true);
+            return one;
+        });
+    }
+
+    /** Does work and waits for its result. */
+    <T> T call(Callable<T> work) {
+        return callThen(work, () -> { });
+    }
+
+    /** Does work and waits for its result; what is to follow it is done right after, while the caller goes on. */
+    <T> T callThen(Callable<T> work, Runnable after) {
+        FutureTask<T> task = new FutureTask<>(work);
+        try {
+            thread.execute(() -> {
+                task.run();
+                after.run();
+            });
+        } catch (RejectedExecutionException e) {
+            throw new IllegalStateException("the store is closed", e);
+        }
+        return await(task);
+    }
+
+    private static <T> T await(FutureTask<T> task) {
+        boolean interrupted = false;
+        try {
+            while (true) {
+                try {
+                    return task.get();
+                } catch (InterruptedException e) {
+                    interrupted = true;
+                } catch (ExecutionException e) {
+                    throw thrown(e.getCause());
+                }
+            }
+        } finally {
+            if (interrupted) {
+                Thread.currentThread().interrupt();
+            }
+        }
+    }
+
+    private static RuntimeException thrown(Throwable cause) {
+        if (cause instanceof Error error) {
+            throw error;
+        }
+        return cause instanceof RuntimeException unchecked ? unchecked : new IllegalStateException(cause);
+    }
+
+    /** Takes no more work; what was taken is done. */
+    @Override
+    public void close() {
+        thread.shutdown();
+    }
+}

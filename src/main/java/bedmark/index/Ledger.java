@@ -1,0 +1,292 @@
+package bedmark.index;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Refused;
+import bedmark.journal.EntryReader;
+import bedmark.journal.Fault;
+import bedmark.journal.FileLayer;
+import bedmark.journal.Journal;
+import bedmark.journal.JournalProof;
+import bedmark.journal.JournalVisitor;
+import bedmark.journal.Mark;
+import bedmark.journal.Place;
+import bedmark.journal.Replay;
+import bedmark.json.EntryCodec;
+import bedmark.survey.Act;
+import bedmark.survey.Entry;
+import java.io.IOException;
+import java.nio.file.Path;
+import java.time.OffsetDateTime;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.UUID;
+import java.util.function.Consumer;
+import java.util.function.Function;
+
+/** Journal and index, kept in step: what the index does not know or knows wrongly comes from the journal. */
+final class Ledger implements AutoCloseable {
+    static final String JOURNAL = "journal";
+    static final String INDEX = "index";
+
+    private final StoreOptions options;
+    private final FileLayer files;
+    private final Path journalFolder;
+    private final Path indexFolder;
+    private final EntryReader reader;
+    private final List<Defect> found = new ArrayList<>();
+    private Optional<Index> index = Optional.empty();
+    private Optional<Journal> journal = Optional.empty();
+    private boolean rebuilt;
+    private long replayed;
+
+    private Ledger(Path folder, StoreOptions options) {
+        this.options = options;
+        this.files = options.files();
+        this.journalFolder = folder.resolve(JOURNAL);
+        this.indexFolder = folder.resolve(INDEX);
+        this.reader = new EntryReader(journalFolder, files);
+    }
+
+    /**
+     * Opens both.
+     *
+     * @param afresh throws the index away first
+     */
+    static Ledger open(Path folder, StoreOptions options, boolean afresh) throws IOException {
+        Ledger ledger = new Ledger(folder, options);
+        try {
+            ledger.open(afresh);
+            return ledger;
+        } catch (IOException | RuntimeException e) {
+            ledger.close();
+            throw e;
+        }
+    }
+
+    private void open(boolean afresh) throws IOException {
+        files.createFolder(indexFolder);
+        boolean known = !afresh && files.exists(indexFolder.resolve(Database.NAME + ".mv.db"));
+        if (known) {
+            openIndex();
+        }
+        Optional<Mark> mark = index.flatMap(Index::mark);
+        Journal opened = Journal.open(journalFolder, files, options.segmentBytes(), mark, options.progress(),
+                new CatchUp());
+        journal = Optional.of(opened);
+        found.addAll(opened.found());
+        ask(Index::mark);
+    }
+
+    private void openIndex() {
+        Optional<Database> database = Optional.empty();
+        try {
+            database = Optional.of(Database.open(indexFolder));
+            index = Optional.of(Index.goOn(database.get(), options.levels(), reader::read));
+        } catch (IndexBroken e) {
+            database.ifPresent(Ledger::closeQuietly);
+        }
+    }
+
+    /** Brings the index up to the journal while that is opened. */
+    private final class CatchUp implements Replay {
+        @Override
+        public void begin(UUID identity, boolean resumed) {
+            if (!resumed) {
+                afresh(identity);
+            }
+        }
+
+        @Override
+        public void entry(long sequence, Place place, byte[] payload) {
+            take(sequence, place, payload);
+        }
+    }
+
+    /** An index without entries, on disk or, where the disk takes none, in memory. */
+    private void afresh(UUID identity) {
+        dropIndex();
+        Optional<Database> database = Optional.empty();
+        try {
+            for (Path file : files.list(indexFolder)) {
+                files.delete(file);
+            }
+            database = Optional.of(Database.open(indexFolder));
+            index = Optional.of(Index.begin(database.get(), options.levels(), reader::read, identity));
+        } catch (IOException | IndexBroken e) {
+            database.ifPresent(Ledger::closeQuietly);
+            inMemory(identity);
+        }
+    }
+
+    private void inMemory(UUID identity) {
+        dropIndex();
+        note(Defect.in(indexFolder.toString(), "index-in-memory"));
+        index = Optional.of(Index.begin(Database.inMemory(), options.levels(), reader::read, identity));
+    }
+
+    private void take(long sequence, Place place, byte[] payload) {
+        replayed++;
+        Optional<Entry> entry = decode(sequence, place, payload);
+        indexing(taker -> {
+            if (entry.isPresent()) {
+                taker.add(entry.get(), place);
+            } else {
+                taker.addUnread(sequence, place);
+            }
+        });
+    }
+
+    private Optional<Entry> decode(long sequence, Place place, byte[] payload) {
+        try {
+            Entry entry = EntryCodec.read(payload);
+            if (entry.sequence() == sequence) {
+                return Optional.of(entry);
+            }
+        } catch (Refused e) {
+            // Named below: it is sound as bytes, but of a later program or none.
+        }
+        note(Defect.in(JOURNAL, "journal-entry-unknown", Long.toString(place.offset()), Long.toString(sequence)));
+        return Optional.empty();
+    }
+
+    /** Changes the index; where it fails, it is made anew when it is next asked. */
+    private void indexing(Consumer<Index> change) {
+        try {
+            index.ifPresent(change);
+        } catch (RuntimeException e) {
+            dropIndex();
+        }
+    }
+
+    private void dropIndex() {
+        Optional<Index> broken = index;
+        index = Optional.empty();
+        broken.ifPresent(Ledger::closeQuietly);
+    }
+
+    private static void closeQuietly(AutoCloseable broken) {
+        try {
+            broken.close();
+        } catch (Exception e) {
+            // It is thrown away or proved when it is opened.
+            return;
+        }
+    }
+
+    /** Asks the index, and makes it anew where it turns out to be broken. */
+    <T> T ask(Function<Index, T> question) {
+        try {
+            return peek(question);
+        } catch (IndexBroken e) {
+            rebuild(this::afresh);
+        }
+        try {
+            return peek(question);
+        } catch (IndexBroken e) {
+            rebuild(this::inMemory);
+        }
+        return peek(question);
+    }
+
+    /** Asks the index as it is. */
+    <T> T peek(Function<Index, T> question) {
+        Index asked = index.orElseThrow(() -> new IndexBroken("there is no index"));
+        asked.flush();
+        return question.apply(asked);
+    }
+
+    private void rebuild(Consumer<UUID> beginning) {
+        rebuilt = true;
+        replayed = 0;
+        beginning.accept(journal().identity());
+        try {
+            JournalProof.of(journalFolder, files, Optional.of(journal().extent()), new JournalVisitor() {
+                @Override
+                public void entry(long sequence, Place place, byte[] payload) {
+                    take(sequence, place, payload);
+                }
+
+                @Override
+                public void flaw(Defect flaw) {
+                    note(flaw);
+                }
+
+                @Override
+                public void walked(long done, long total) {
+                    options.progress().at(done, total);
+                }
+            });
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("journal", e, files, journalFolder), e);
+        }
+    }
+
+    private void note(Defect defect) {
+        if (!found.contains(defect)) {
+            found.add(defect);
+        }
+    }
+
+    /**
+     * Saves an act, if it is possible.
+     *
+     * @throws Refused where it is not; nothing was written
+     */
+    Journal.Saved save(OffsetDateTime at, String person, UUID device, Act act) {
+        Entry candidate = new Entry(journal().last() + 1, at, person, device, act);
+        ask(asked -> {
+            ActRules.requirePossible(asked, candidate);
+            return true;
+        });
+        return journal().append(at, person, device, act);
+    }
+
+    /** Tells the index of an entry that was saved. */
+    void index(Journal.Saved saved) {
+        indexing(asked -> {
+            asked.add(saved.entry(), saved.place());
+            asked.flush();
+        });
+    }
+
+    /** The last entry that this version can read. */
+    Optional<Entry> newest() {
+        return ask(asked -> asked.mark().flatMap(mark -> {
+            try {
+                return Optional.of(reader.read(mark.sequence(), mark.place()));
+            } catch (Refused e) {
+                return Optional.empty();
+            }
+        }));
+    }
+
+    private Journal journal() {
+        return journal.orElseThrow();
+    }
+
+    long last() {
+        return journal().last();
+    }
+
+    Journal.Extent extent() {
+        return journal().extent();
+    }
+
+    Optional<Branch> register() {
+        return ask(Index::register);
+    }
+
+    Opening opening() {
+        return new Opening(rebuilt, replayed, found);
+    }
+
+    @Override
+    public void close() {
+        indexing(Index::flush);
+        dropIndex();
+        reader.close();
+        journal.ifPresent(Journal::close);
+    }
+}

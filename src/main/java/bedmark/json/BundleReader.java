@@ -1,0 +1,112 @@
+package bedmark.json;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Pointer;
+import bedmark.document.Refused;
+import bedmark.quantity.Quantity;
+import bedmark.survey.Bundle;
+import bedmark.survey.Register;
+import bedmark.survey.Round;
+import bedmark.survey.Survey;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * Reads bundles: strict JSON, the published schema, then what no schema tells (ids that must exist, stations within
+ * the zone). The first defect in the text is the one reason of the refusal, with pointer, line and column. What a
+ * verdict needs and is absent is no defect.
+ */
+public final class BundleReader {
+    private BundleReader() {
+    }
+
+    /** Compiled when the first bundle is read, not when the program starts. */
+    private static final class Compiled {
+        private static final SchemaCheck SCHEMA = new SchemaCheck("bundle.schema.json");
+    }
+
+    /**
+     * Reads a bundle.
+     *
+     * @param bytes UTF-8
+     * @throws Refused where it is none, of another version, or holds something impossible
+     */
+    public static Bundle read(byte[] bytes) {
+        Document document = JsonReader.read(bytes);
+        try {
+            requireFormat(document.root());
+            Compiled.SCHEMA.check(document).stream().findFirst().ifPresent(defect -> {
+                throw new Refused(defect);
+            });
+            Bundle bundle = new Bundle(document.root());
+            check(bundle);
+            return bundle;
+        } catch (Refused e) {
+            throw new Refused(document.placed(e.defect()), e);
+        }
+    }
+
+    /** Before anything else: another kind of file, or a later version, is not measured by this version's schema. */
+    private static void requireFormat(Branch root) {
+        String format = root.text("format").orElse("");
+        if (!Bundle.FORMAT.equals(format)) {
+            throw new Refused(Defect.at(Pointer.of("format"), "format-unknown", format, Bundle.FORMAT));
+        }
+        BigDecimal version = root.number("version").orElse(BigDecimal.ZERO);
+        if (version.compareTo(BigDecimal.valueOf(Bundle.VERSION)) != 0) {
+            throw new Refused(Defect.at(Pointer.of("version"), "version-unknown", version.toPlainString(),
+                    Integer.toString(Bundle.VERSION)));
+        }
+    }
+
+    private static void check(Bundle bundle) {
+        Register register = bundle.register();
+        List<Round> rounds = bundle.rounds();
+        for (int i = 0; i < rounds.size(); i++) {
+            List<Round.Point> points = rounds.get(i).points();
+            for (int k = 0; k < points.size(); k++) {
+                if (register.transfer(points.get(k).transfer()).isEmpty()) {
+                    throw new Refused(Defect.at(Pointer.of("rounds").child(i).child("points").child(k)
+                            .child("transfer"), "transfer-unknown", points.get(k).transfer()));
+                }
+            }
+        }
+        List<Survey> surveys = bundle.surveys();
+        for (int i = 0; i < surveys.size(); i++) {
+            Pointer where = Pointer.of("surveys").child(i).child("readings");
+            try {
+                checkStations(surveys.get(i).readings());
+            } catch (Refused e) {
+                throw new Refused(e.defect().below(where), e);
+            }
+        }
+    }
+
+    private static void checkStations(Branch readings) {
+        Optional<Quantity> length = readings.quantity("loadingZoneLength");
+        List<Quantity> seen = new ArrayList<>();
+        List<Branch> stations = readings.branches("bedDepths");
+        for (int i = 0; i < stations.size(); i++) {
+            Pointer where = Pointer.of("bedDepths").child(i).child("position");
+            Optional<Quantity> position = stations.get(i).quantity("position");
+            if (position.isEmpty()) {
+                continue;
+            }
+            if (length.filter(end -> Quantity.BY_SIZE.compare(position.get(), end) > 0).isPresent()) {
+                throw new Refused(Defect.at(where, "station-outside-zone", show(position.get()),
+                        show(length.get())));
+            }
+            if (seen.stream().anyMatch(other -> Quantity.BY_SIZE.compare(other, position.get()) == 0)) {
+                throw new Refused(Defect.at(where, "station-twice", show(position.get())));
+            }
+            seen.add(position.get());
+        }
+    }
+
+    private static String show(Quantity quantity) {
+        return quantity.value().toPlainString() + " " + quantity.unit().code();
+    }
+}

@@ -1,0 +1,8 @@
+package bedmark.picture;
+
+/** The faces of the one typeface. */
+public enum Face {
+    PLAIN,
+    BOLD,
+    ITALIC
+}

@@ -1,0 +1,36 @@
+package bedmark.screen;
+
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.Weight;
+import bedmark.screen.part.TopBar;
+import javafx.scene.control.Label;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.VBox;
+
+/** Makes the head of a screen: where the person is and whether all is saved; below it, trouble in words. */
+public final class Heads {
+    private Heads() {
+    }
+
+    /** A head that goes on listening until {@code listening} ends. */
+    public static VBox head(Workplace workplace, Listening listening, String title, String subtitle) {
+        TopBar bar = new TopBar();
+        bar.titleProperty().set(title);
+        bar.subtitleProperty().set(subtitle);
+        listening.to(SavedMark.of(workplace), bar.asideProperty()::set);
+        Label words = new Label();
+        words.setWrapText(true);
+        words.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(words, Priority.ALWAYS);
+        HBox trouble = new HBox(words, new ActionButton(Weight.PLAIN, workplace.wording().text("screen.try-again"),
+                workplace.scribe()::retry));
+        trouble.getStyleClass().add("trouble");
+        trouble.managedProperty().bind(trouble.visibleProperty());
+        listening.to(workplace.scribe().troubleProperty(), defect -> {
+            trouble.setVisible(defect.isPresent());
+            words.setText(SavedMark.trouble(workplace).orElse(""));
+        });
+        return new VBox(bar, trouble);
+    }
+}

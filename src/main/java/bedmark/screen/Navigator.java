@@ -1,0 +1,20 @@
+package bedmark.screen;
+
+import bedmark.screen.round.RoundModel;
+import bedmark.screen.round.RoundRow;
+
+/** The ways from screen to screen. */
+public interface Navigator {
+
+    /** To the start of a walk. */
+    void toStart();
+
+    /** To the round that is walked. */
+    void toRound(RoundModel round);
+
+    /** To a transfer point; its survey is begun where there is none. */
+    void toZone(RoundModel round, RoundRow row);
+
+    /** To the queue and the export. */
+    void toQueue(RoundModel round);
+}

@@ -1,0 +1,127 @@
+package bedmark.screen.pad;
+
+import bedmark.screen.theme.Icon;
+import bedmark.screen.theme.IconView;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import javafx.geometry.Pos;
+import javafx.scene.control.Button;
+import javafx.scene.control.ContentDisplay;
+import javafx.scene.control.Label;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.RowConstraints;
+import javafx.scene.layout.StackPane;
+
+/** The keys of the pad, five across and four down, as wide and high as there is room. */
+public final class NumericPad extends StackPane {
+    private static final List<List<PadKey>> ROWS = List.of(
+            List.of(PadKey.DIGIT_7, PadKey.DIGIT_8, PadKey.DIGIT_9, PadKey.STEP_DOWN, PadKey.BACKSPACE),
+            List.of(PadKey.DIGIT_4, PadKey.DIGIT_5, PadKey.DIGIT_6, PadKey.STEP_UP, PadKey.UNIT),
+            List.of(PadKey.DIGIT_1, PadKey.DIGIT_2, PadKey.DIGIT_3, PadKey.FRACTION, PadKey.BACK),
+            List.of(PadKey.DIGIT_0, PadKey.DECIMAL, PadKey.SIGN, PadKey.UNDO, PadKey.NEXT));
+
+    private final PadModel model;
+    private final PadWords words;
+    private final Map<PadKey, Button> keys = new EnumMap<>(PadKey.class);
+
+    public NumericPad(PadModel model, PadWords words) {
+        this.model = model;
+        this.words = words;
+        getStyleClass().add("numeric-pad");
+        getChildren().addAll(grid(), note());
+        model.setupProperty().subscribe(setup -> offer());
+    }
+
+    private GridPane grid() {
+        GridPane grid = new GridPane();
+        grid.getStyleClass().add("keys");
+        for (int row = 0; row < ROWS.size(); row++) {
+            for (int column = 0; column < ROWS.get(row).size(); column++) {
+                grid.add(key(ROWS.get(row).get(column)), column, row);
+            }
+            RowConstraints equal = new RowConstraints();
+            equal.setPercentHeight(100.0 / ROWS.size());
+            equal.setVgrow(Priority.ALWAYS);
+            grid.getRowConstraints().add(equal);
+        }
+        for (int column = 0; column < ROWS.get(0).size(); column++) {
+            ColumnConstraints equal = new ColumnConstraints();
+            equal.setPercentWidth(100.0 / ROWS.get(0).size());
+            grid.getColumnConstraints().add(equal);
+        }
+        return grid;
+    }
+
+    private Button key(PadKey key) {
+        Button button = new Button();
+        button.getStyleClass().addAll("pad-key", key.digit() >= 0 || key == PadKey.DECIMAL ? "figure" : "word");
+        button.setId("pad-" + key.name().toLowerCase(Locale.ROOT).replace('_', '-'));
+        button.setFocusTraversable(false);
+        button.setMaxSize(Double.MAX_VALUE, Double.MAX_VALUE);
+        button.setOnAction(event -> model.press(key));
+        if (key == PadKey.BACKSPACE) {
+            button.setGraphic(new IconView(Icon.BACKSPACE));
+            button.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
+        }
+        if (key == PadKey.NEXT) {
+            button.getStyleClass().add("primary");
+        }
+        keys.put(key, button);
+        return button;
+    }
+
+    /** The refusal, on a plate over the upper edge of the keys, where it covers no face of a key. */
+    private Label note() {
+        Label note = new Label();
+        note.getStyleClass().add("pad-note");
+        note.setMouseTransparent(true);
+        note.setMaxWidth(Double.MAX_VALUE);
+        note.setWrapText(true);
+        StackPane.setAlignment(note, Pos.TOP_LEFT);
+        note.textProperty().bind(model.noteProperty().map(refusal -> refusal.map(words.note()).orElse("")));
+        note.visibleProperty().bind(note.textProperty().isNotEmpty());
+        return note;
+    }
+
+    /** Puts the faces of the field in hand on the keys, and takes those away that it has no use for. */
+    private void offer() {
+        Optional<PadSetup> setup = model.setupProperty().get();
+        keys.forEach((key, button) -> {
+            String face = face(key, setup);
+            button.setText(face);
+            button.setAccessibleText(name(key, face));
+            button.setDisable(!model.offers(key));
+        });
+    }
+
+    private String face(PadKey key, Optional<PadSetup> setup) {
+        return switch (key) {
+            case DECIMAL -> setup.map(field -> String.valueOf(field.decimalSign())).orElse("");
+            case FRACTION -> "¼ ½ ¾";
+            case SIGN -> "±";
+            case STEP_DOWN -> setup.flatMap(PadSetup::steps).map(PadSetup.Steps::down).orElse("");
+            case STEP_UP -> setup.flatMap(PadSetup::steps).map(PadSetup.Steps::up).orElse("");
+            case UNIT -> setup.flatMap(PadSetup::units).orElse("");
+            case BACKSPACE -> "";
+            case UNDO -> words.undo();
+            case BACK -> words.back();
+            case NEXT -> words.next();
+            default -> String.valueOf(key.digit());
+        };
+    }
+
+    private String name(PadKey key, String face) {
+        return switch (key) {
+            case DECIMAL -> words.decimal();
+            case FRACTION -> words.fraction();
+            case SIGN -> words.sign();
+            case BACKSPACE -> words.backspace();
+            default -> face;
+        };
+    }
+}

@@ -1,0 +1,100 @@
+package bedmark.screen.part;
+
+import javafx.beans.property.BooleanProperty;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleBooleanProperty;
+import javafx.beans.property.SimpleObjectProperty;
+import javafx.beans.property.StringProperty;
+import javafx.css.PseudoClass;
+import javafx.geometry.Pos;
+import javafx.scene.AccessibleRole;
+import javafx.scene.control.Label;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+
+/**
+ * The box of a number: value and unit at the left, at the right the ghost of the last survey, which is never a value.
+ * Pressing it puts the pad at it; typing goes through the pad.
+ */
+public final class FieldBox extends HBox {
+    private static final PseudoClass ACTIVE = PseudoClass.getPseudoClass("active");
+    private static final PseudoClass FRESH = PseudoClass.getPseudoClass("fresh");
+    static final PseudoClass QUESTIONED = PseudoClass.getPseudoClass("questioned");
+    static final PseudoClass WRONG = PseudoClass.getPseudoClass("wrong");
+
+    private final Label value = Labels.label("value");
+    private final Label unit = Labels.label("unit");
+    private final Label ghost = Labels.label("ghost");
+    private final BooleanProperty active = new SimpleBooleanProperty(this, "active");
+    private final BooleanProperty fresh = new SimpleBooleanProperty(this, "fresh");
+    private final ObjectProperty<Judgement> judgement =
+            new SimpleObjectProperty<>(this, "judgement", Judgement.NONE);
+
+    /**
+     * @param name   of the field, for who cannot see it
+     * @param chosen runs when the field is pressed, or comes into focus while the pad types elsewhere
+     */
+    public FieldBox(String name, Runnable chosen) {
+        getStyleClass().add("field-box");
+        setAccessibleRole(AccessibleRole.TEXT_FIELD);
+        setAccessibleText(name);
+        setFocusTraversable(true);
+        Region between = new Region();
+        HBox.setHgrow(between, Priority.ALWAYS);
+        HBox row = new HBox(value, unit, between, ghost);
+        row.getStyleClass().add("row");
+        row.setAlignment(Pos.BASELINE_LEFT);
+        HBox.setHgrow(row, Priority.ALWAYS);
+        setAlignment(Pos.CENTER);
+        setFillHeight(false);
+        getChildren().add(row);
+        setMaxWidth(Double.MAX_VALUE);
+        value.setMinWidth(Region.USE_PREF_SIZE);
+        value.managedProperty().bind(value.textProperty().isNotEmpty());
+        unit.setMinWidth(Region.USE_PREF_SIZE);
+        active.subscribe(on -> pseudoClassStateChanged(ACTIVE, on));
+        fresh.subscribe(on -> pseudoClassStateChanged(FRESH, on));
+        judgement.subscribe(judged -> {
+            pseudoClassStateChanged(QUESTIONED, judged == Judgement.QUESTIONED);
+            pseudoClassStateChanged(WRONG, judged == Judgement.WRONG);
+        });
+        setOnMousePressed(event -> {
+            requestFocus();
+            chosen.run();
+        });
+        focusedProperty().subscribe(focused -> {
+            if (focused && !active.get()) {
+                chosen.run();
+            }
+        });
+    }
+
+    /** What was typed, as typed; empty while the field is. */
+    public StringProperty valueProperty() {
+        return value.textProperty();
+    }
+
+    public StringProperty unitProperty() {
+        return unit.textProperty();
+    }
+
+    /** What the last survey found, in words. */
+    public StringProperty ghostProperty() {
+        return ghost.textProperty();
+    }
+
+    /** Whether the pad types here. */
+    public BooleanProperty activeProperty() {
+        return active;
+    }
+
+    /** Whether the next digit takes the place of the whole value. */
+    public BooleanProperty freshProperty() {
+        return fresh;
+    }
+
+    public ObjectProperty<Judgement> judgementProperty() {
+        return judgement;
+    }
+}

@@ -1,0 +1,210 @@
+package bedmark.screen.queue;
+
+import bedmark.index.Export;
+import bedmark.index.SurveyLine;
+import bedmark.screen.Heads;
+import bedmark.screen.Listening;
+import bedmark.screen.Navigator;
+import bedmark.screen.Screen;
+import bedmark.screen.Workplace;
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.FootBar;
+import bedmark.screen.part.SectionHeader;
+import bedmark.screen.part.Weight;
+import bedmark.screen.round.RoundModel;
+import bedmark.screen.theme.Icon;
+import bedmark.survey.Register;
+import bedmark.wording.Wording;
+import java.nio.file.Path;
+import java.time.format.DateTimeFormatter;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import javafx.scene.Node;
+import javafx.scene.control.ContentDisplay;
+import javafx.scene.control.Label;
+import javafx.scene.control.ProgressBar;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+
+/** The way to the office: completed surveys into the queue, the queue into a folder or onto a stick, the receipt. */
+public final class QueueView implements Screen {
+    private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm");
+
+    private final Workplace workplace;
+    private final QueueModel model;
+    private final Wording wording;
+    private final Listening listening = new Listening();
+    private final VBox steps = new VBox();
+    private final VBox outcome = new VBox();
+    private final ProgressBar bar = new ProgressBar(0);
+    private final BorderPane body = new BorderPane();
+    private final VBox head;
+    private final FootBar foot;
+
+    public QueueView(Workplace workplace, QueueModel model, RoundModel round, Navigator navigator) {
+        this.workplace = workplace;
+        this.model = model;
+        this.wording = workplace.wording();
+        this.head = Heads.head(workplace, listening, wording.text("screen.queue.title"), round.round().name());
+        ActionButton back = ActionButton.with(Icon.BACK, ContentDisplay.LEFT, Weight.QUIET,
+                wording.text("screen.round.title"), () -> navigator.toRound(round));
+        back.setId("foot-back");
+        this.foot = new FootBar(Optional.of(back), Optional.empty(), Optional.empty());
+        steps.getStyleClass().add("questions");
+        outcome.getStyleClass().add("summary");
+        bar.setMaxWidth(Double.MAX_VALUE);
+        body.getStyleClass().add("queue-body");
+        body.setCenter(scrolling(steps));
+        listening.onChange(model.completedProperty(), lines -> layOut());
+        listening.onChange(model.queuedProperty(), lines -> layOut());
+        listening.onChange(model.progressProperty(), share -> progress(share.doubleValue()));
+        listening.onChange(model.receiptProperty(), receipt -> showOutcome());
+        listening.onChange(model.troubleProperty(), trouble -> showOutcome());
+        listening.onChange(model.exportsProperty(), exports -> showOutcome());
+        layOut();
+        showOutcome();
+    }
+
+    private static ScrollPane scrolling(VBox content) {
+        ScrollPane scroll = new ScrollPane(content);
+        scroll.setFitToWidth(true);
+        scroll.getStyleClass().add("form-scroll");
+        return scroll;
+    }
+
+    private void progress(double share) {
+        boolean running = share >= 0;
+        if (running != steps.getChildren().contains(bar)) {
+            layOut();
+        }
+        bar.setProgress(Math.max(0, share));
+    }
+
+    private void layOut() {
+        List<SurveyLine> completed = model.completedProperty().get();
+        List<SurveyLine> queued = model.queuedProperty().get();
+        steps.getChildren().setAll(new SectionHeader(wording.text("screen.queue.completed")),
+                wrapped(completed.isEmpty() ? wording.text("screen.queue.none-completed") : tags(completed)));
+        ActionButton queue = button("queue-all", completed.isEmpty() ? Weight.PLAIN : Weight.PRIMARY,
+                wording.text("screen.queue.queue-all", completed.size()), model::queueAll);
+        queue.setDisable(completed.isEmpty());
+        steps.getChildren().addAll(queue, new SectionHeader(wording.text("screen.queue.queued")),
+                wrapped(queued.isEmpty() ? wording.text("screen.queue.none-queued") : tags(queued)));
+        if (model.progressProperty().get() >= 0) {
+            steps.getChildren().addAll(wrapped(wording.text("screen.queue.exporting")), bar,
+                    button("cancel-export", Weight.PLAIN, wording.text("screen.cancel"), model::cancel));
+        } else {
+            ActionButton export = button("export", queued.isEmpty() ? Weight.PLAIN : Weight.PRIMARY,
+                    wording.text("screen.queue.export", queued.size()), this::export);
+            export.setDisable(queued.isEmpty());
+            steps.getChildren().add(export);
+        }
+        steps.getChildren().add(wrapped(wording.text("screen.queue.not-deleted")));
+    }
+
+    private ActionButton button(String id, Weight weight, String text, Runnable action) {
+        ActionButton button = new ActionButton(weight, text, action);
+        button.setId(id);
+        button.setMaxWidth(Double.MAX_VALUE);
+        return button;
+    }
+
+    private String tags(List<SurveyLine> lines) {
+        Register register = workplace.site().register();
+        return lines.stream().map(line -> register.transfer(line.transfer()).map(Register.Transfer::tag)
+                .orElse(line.transfer())).collect(Collectors.joining(", "));
+    }
+
+    private void export() {
+        workplace.folderChoice().choose(wording.text("screen.queue.choose-folder"),
+                workplace.preferences().exportFolder().map(Path::of)).ifPresent(model::export);
+    }
+
+    private void showOutcome() {
+        outcome.getChildren().clear();
+        model.troubleProperty().get().ifPresent(defect -> {
+            Label trouble = wrapped(wording.sentence(defect));
+            trouble.getStyleClass().add("trouble-text");
+            outcome.getChildren().addAll(new SectionHeader(wording.text("screen.queue.failed")), trouble,
+                    wrapped(wording.text("screen.queue.still-here")));
+        });
+        model.receiptProperty().get().ifPresent(this::showReceipt);
+        outcome.getChildren().add(new SectionHeader(wording.text("screen.queue.left")));
+        List<Export> exports = model.exportsProperty().get();
+        if (exports.isEmpty()) {
+            outcome.getChildren().add(wrapped(wording.text("screen.queue.none-left")));
+        }
+        exports.stream().limit(6).forEach(export -> outcome.getChildren().add(wrapped(
+                wording.text("screen.queue.export-line", TIME.format(export.at()), export.pack(),
+                        export.surveys().size(), export.folder()))));
+    }
+
+    private void showReceipt(QueueModel.Receipt receipt) {
+        Label done = wrapped(wording.text("screen.receipt.done", receipt.surveys()));
+        done.getStyleClass().add("card-title");
+        done.setId("receipt");
+        VBox box = new VBox(done,
+                line("screen.receipt.file", receipt.file().getFileName().toString()),
+                line("screen.receipt.folder", String.valueOf(receipt.file().getParent())),
+                line("screen.receipt.sha256", receipt.sha256()),
+                line("screen.receipt.key", receipt.fingerprint()),
+                line("screen.receipt.time", TIME.format(receipt.at())));
+        box.getStyleClass().add("receipt");
+        outcome.getChildren().add(box);
+    }
+
+    private VBox line(String key, String value) {
+        Label name = new Label(wording.text(key));
+        name.getStyleClass().add("caption");
+        return new VBox(name, wrapped(value));
+    }
+
+    private static Label wrapped(String text) {
+        Label label = new Label(text);
+        label.setWrapText(true);
+        label.setMinHeight(Region.USE_PREF_SIZE);
+        return label;
+    }
+
+    @Override
+    public Node head() {
+        return head;
+    }
+
+    @Override
+    public Node body() {
+        return body;
+    }
+
+    @Override
+    public Node foot() {
+        return foot;
+    }
+
+    @Override
+    public void turned(boolean portrait) {
+        body.setRight(null);
+        body.setBottom(null);
+        outcome.getStyleClass().setAll("summary", portrait ? "portrait" : "landscape");
+        if (portrait) {
+            body.setBottom(outcome);
+        } else {
+            body.setRight(outcome);
+        }
+        VBox.setVgrow(outcome, Priority.ALWAYS);
+    }
+
+    @Override
+    public void shown() {
+        body.requestFocus();
+    }
+
+    @Override
+    public void left() {
+        listening.end();
+    }
+}

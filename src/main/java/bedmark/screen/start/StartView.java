@@ -1,0 +1,258 @@
+package bedmark.screen.start;
+
+import bedmark.quantity.UnitSystem;
+import bedmark.screen.Heads;
+import bedmark.screen.Listening;
+import bedmark.screen.Navigator;
+import bedmark.screen.Preferences;
+import bedmark.screen.Screen;
+import bedmark.screen.Workplace;
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.FootBar;
+import bedmark.screen.part.SectionHeader;
+import bedmark.screen.part.Weight;
+import bedmark.screen.round.RoundModel;
+import bedmark.screen.theme.Icon;
+import bedmark.survey.Round;
+import bedmark.wording.Wording;
+import bedmark.words.Words;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import javafx.scene.Node;
+import javafx.scene.control.ContentDisplay;
+import javafx.scene.control.Label;
+import javafx.scene.control.ProgressBar;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.TextField;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+
+/** The start of a walk: who, which round, how the screen is to be; beside it the safety card. */
+public final class StartView implements Screen {
+    private static final int CAUTIONS = 6;
+
+    private final Workplace workplace;
+    private final StartModel model;
+    private final Navigator navigator;
+    private final Wording wording;
+    private final Listening listening = new Listening();
+    private final VBox questions = new VBox();
+    private final VBox card = new VBox();
+    private final ScrollPane scroll = new ScrollPane(questions);
+    private final BorderPane body = new BorderPane();
+    private final TextField person = new TextField();
+    private final VBox head;
+    private final FootBar foot;
+
+    public StartView(Workplace workplace, StartModel model, Navigator navigator) {
+        this.workplace = workplace;
+        this.model = model;
+        this.navigator = navigator;
+        this.wording = workplace.wording();
+        this.head = Heads.head(workplace, listening, wording.text("screen.name"), wording.text("screen.start.title"));
+        this.foot = footBar();
+        questions.getStyleClass().add("questions");
+        card.getStyleClass().add("safety-card");
+        scroll.setFitToWidth(true);
+        scroll.getStyleClass().add("form-scroll");
+        body.getStyleClass().add("start-body");
+        body.setCenter(scroll);
+        safetyCard();
+        listening.to(workplace.siteProperty(), site -> ask());
+        listening.onChange(model.loadingProperty(), share -> ask());
+        listening.onChange(model.troubleProperty(), trouble -> ask());
+    }
+
+    private void ask() {
+        questions.getChildren().clear();
+        if (!model.hasPlant()) {
+            offerDemo();
+            questions.getChildren().addAll(choice("screen.start.language", languages()));
+            return;
+        }
+        person.setId("person");
+        person.setPromptText(wording.text("screen.start.person-prompt"));
+        if (!person.textProperty().isBound()) {
+            person.setText(model.personProperty().get());
+            model.personProperty().bind(person.textProperty());
+        }
+        Label name = new Label(wording.text("screen.start.person"));
+        name.setLabelFor(person);
+        questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()),
+                choice("screen.start.units", units()), choice("screen.start.language", languages()),
+                choice("screen.start.light", lights()), choice("screen.start.hand", hands()));
+    }
+
+    private void offerDemo() {
+        Label empty = wrapped(wording.text(model.canLoadDemo() ? "screen.start.empty" : "screen.start.empty-no-demo"));
+        questions.getChildren().add(empty);
+        model.troubleProperty().get().ifPresent(defect ->
+                questions.getChildren().add(wrapped(wording.sentence(defect))));
+        double share = model.loadingProperty().get();
+        if (share >= 0) {
+            ProgressBar bar = new ProgressBar(share);
+            bar.setMaxWidth(Double.MAX_VALUE);
+            questions.getChildren().addAll(wrapped(wording.text("screen.start.loading")), bar);
+        } else if (model.canLoadDemo()) {
+            ActionButton load = new ActionButton(Weight.PRIMARY, wording.text("screen.start.load-demo"),
+                    model::loadDemo);
+            load.setId("load-demo");
+            load.setMaxWidth(Double.MAX_VALUE);
+            questions.getChildren().add(load);
+        }
+    }
+
+    private VBox choice(String key, List<ToggleButton> buttons) {
+        HBox row = new HBox();
+        row.getStyleClass().add("row");
+        buttons.forEach(button -> {
+            button.getStyleClass().add("secondary-target");
+            button.setMaxWidth(Double.MAX_VALUE);
+            button.setPrefWidth(100);
+            button.setWrapText(true);
+            HBox.setHgrow(button, Priority.ALWAYS);
+        });
+        row.getChildren().addAll(buttons);
+        VBox box = new VBox(new Label(wording.text(key)), row);
+        box.getStyleClass().add("question");
+        return box;
+    }
+
+    private List<ToggleButton> rounds() {
+        return model.rounds().stream().map(round -> toggle("round-" + round.id(), round.name(),
+                round.equals(model.roundProperty().get()), () -> {
+                    model.roundProperty().set(round);
+                    ask();
+                })).toList();
+    }
+
+    private List<ToggleButton> units() {
+        return List.of(UnitSystem.values()).stream().map(system -> toggle("units-" + system.code(),
+                wording.text("screen.start.units." + system.code()), workplace.preferences().units() == system,
+                () -> prefer(workplace.preferences().withUnits(system)))).toList();
+    }
+
+    private List<ToggleButton> languages() {
+        return Words.LANGUAGES.stream().map(locale -> toggle("language-" + locale.getLanguage(),
+                capital(locale.getDisplayLanguage(locale), locale),
+                workplace.preferences().locale().getLanguage().equals(locale.getLanguage()),
+                () -> prefer(workplace.preferences().withLocale(locale)))).toList();
+    }
+
+    private static String capital(String word, Locale locale) {
+        return word.substring(0, 1).toUpperCase(locale) + word.substring(1);
+    }
+
+    private List<ToggleButton> lights() {
+        boolean night = workplace.preferences().night();
+        return List.of(toggle("light-day", wording.text("screen.start.light.day"), !night,
+                        () -> prefer(workplace.preferences().withNight(false))),
+                toggle("light-night", wording.text("screen.start.light.night"), night,
+                        () -> prefer(workplace.preferences().withNight(true))));
+    }
+
+    private List<ToggleButton> hands() {
+        boolean gloves = workplace.preferences().gloves();
+        return List.of(toggle("hand-bare", wording.text("screen.start.hand.bare"), !gloves,
+                        () -> prefer(workplace.preferences().withGloves(false))),
+                toggle("hand-gloved", wording.text("screen.start.hand.gloved"), gloves,
+                        () -> prefer(workplace.preferences().withGloves(true))));
+    }
+
+    private void prefer(Preferences changed) {
+        workplace.preferencesProperty().set(changed);
+        ask();
+    }
+
+    private static ToggleButton toggle(String id, String text, boolean selected, Runnable action) {
+        ToggleButton button = new ToggleButton(text);
+        button.setId(id);
+        button.setSelected(selected);
+        button.setOnAction(event -> action.run());
+        return button;
+    }
+
+    private void safetyCard() {
+        Label title = wrapped(wording.text("screen.safety.title"));
+        title.getStyleClass().add("card-title");
+        card.getChildren().add(title);
+        for (int i = 1; i <= CAUTIONS; i++) {
+            card.getChildren().add(wrapped(wording.text("screen.safety." + i)));
+        }
+        ToggleButton read = new ToggleButton(wording.text("screen.safety.read"));
+        read.setId("caution-read");
+        read.setWrapText(true);
+        read.setMaxWidth(Double.MAX_VALUE);
+        read.selectedProperty().bindBidirectional(model.cautionReadProperty());
+        card.getChildren().add(read);
+    }
+
+    private static Label wrapped(String text) {
+        Label label = new Label(text);
+        label.setWrapText(true);
+        label.setMinHeight(Region.USE_PREF_SIZE);
+        return label;
+    }
+
+    private FootBar footBar() {
+        ActionButton start = ActionButton.with(Icon.NEXT, ContentDisplay.RIGHT, Weight.PRIMARY,
+                wording.text("screen.start.start"), this::start);
+        start.setId("start-walk");
+        start.disableProperty().bind(model.ready().not());
+        Label version = new Label(wording.text("screen.notice-short"));
+        version.setWrapText(true);
+        return new FootBar(Optional.empty(), Optional.of(version), Optional.of(start));
+    }
+
+    private void start() {
+        Round round = model.roundProperty().get();
+        model.start(() -> navigator.toRound(new RoundModel(workplace, round)));
+    }
+
+    @Override
+    public Node head() {
+        return head;
+    }
+
+    @Override
+    public Node body() {
+        return body;
+    }
+
+    @Override
+    public Node foot() {
+        return foot;
+    }
+
+    @Override
+    public void turned(boolean portrait) {
+        body.setRight(null);
+        body.setBottom(null);
+        card.getStyleClass().setAll("safety-card", portrait ? "portrait" : "landscape");
+        if (portrait) {
+            body.setBottom(card);
+        } else {
+            body.setRight(card);
+        }
+    }
+
+    @Override
+    public void shown() {
+        if (model.hasPlant() && model.personProperty().get().isEmpty()) {
+            person.requestFocus();
+        } else {
+            body.requestFocus();
+        }
+    }
+
+    @Override
+    public void left() {
+        model.personProperty().unbind();
+        listening.end();
+    }
+}

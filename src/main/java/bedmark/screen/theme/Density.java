@@ -1,0 +1,75 @@
+package bedmark.screen.theme;
+
+import java.util.Objects;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+
+/**
+ * Turns millimetres of the glass into logical pixels, so that a target is as large as a finger on every screen.
+ *
+ * @param dpi  logical pixels to the inch, positive
+ * @param hand whose targets are laid out
+ */
+public record Density(double dpi, Hand hand) {
+
+    /** A 10.1-inch screen of 1280 × 800. */
+    public static final double DEFAULT_DPI = 149;
+
+    private static final double MM_PER_INCH = 25.4;
+    private static final Pattern LENGTH = Pattern.compile("\\b(\\d+(?:\\.\\d+)?)mm\\b");
+    private static final Pattern TARGET = Pattern.compile("\\b(target|secondary)-height\\b");
+
+    public Density {
+        if (!(dpi > 0)) {
+            throw new IllegalArgumentException("a screen has a density");
+        }
+        Objects.requireNonNull(hand);
+    }
+
+    /** The density of the default screen for a bare hand. */
+    public static Density standard() {
+        return new Density(DEFAULT_DPI, Hand.BARE);
+    }
+
+    /**
+     * The density of a screen whose pixels the window system gathers into larger logical ones.
+     *
+     * @param physicalDpi pixels of the glass to the inch
+     * @param outputScale pixels of the glass to a logical pixel
+     */
+    public static Density of(double physicalDpi, double outputScale, Hand hand) {
+        return new Density(physicalDpi / outputScale, hand);
+    }
+
+    /** A length on the glass in whole logical pixels, never less than asked for. */
+    public double mm(double millimetres) {
+        return Math.ceil(millimetres * perMm() - 1e-6);
+    }
+
+    /** Logical pixels to the millimetre. */
+    public double perMm() {
+        return dpi / MM_PER_INCH;
+    }
+
+    /** Least height of a target, in logical pixels. */
+    public double target() {
+        return mm(hand.target());
+    }
+
+    /** Least height of a secondary target, in logical pixels. */
+    public double secondary() {
+        return mm(hand.secondary());
+    }
+
+    /** A style sheet with all millimetres and target heights written out as pixels of this density. */
+    String transcribe(String sheet) {
+        String targets = TARGET.matcher(sheet).replaceAll(match -> Matcher.quoteReplacement(
+                pixels(match.group(1).equals("target") ? target() : secondary())));
+        return LENGTH.matcher(targets).replaceAll(match ->
+                Matcher.quoteReplacement(pixels(mm(Double.parseDouble(match.group(1))))));
+    }
+
+    private static String pixels(double pixels) {
+        return (long) pixels + "px";
+    }
+}

@@ -1,0 +1,224 @@
+package bedmark.screen.zone;
+
+import bedmark.document.Node;
+import bedmark.form.Choice;
+import bedmark.form.Texts;
+import bedmark.quantity.Unit;
+import bedmark.screen.Listening;
+import bedmark.screen.pad.NumericPad;
+import bedmark.screen.pad.PadCommand;
+import bedmark.screen.pad.PadKeyboard;
+import bedmark.screen.pad.PadModel;
+import bedmark.screen.pad.PadSetup;
+import bedmark.screen.pad.PadWords;
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.Weight;
+import bedmark.wording.Wording;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import javafx.scene.Parent;
+import javafx.scene.control.Button;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.TextArea;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.StackPane;
+import javafx.scene.layout.VBox;
+
+/** Where the active cell is filled in: the pad for numbers, buttons for choices, the keyboard for words. */
+final class EntryPane extends StackPane {
+    private static final int COLUMNS = 2;
+
+    private final ZoneModel model;
+    private final Wording wording;
+    private final PadModel pad = new PadModel(this::command);
+    private final NumericPad numericPad;
+    private boolean editing;
+
+    EntryPane(ZoneModel model, Wording wording, Listening listening) {
+        this.model = model;
+        this.wording = wording;
+        this.numericPad = new NumericPad(pad, words(wording));
+        getStyleClass().add("entry-pane");
+        listening.to(model.activeProperty(), this::show);
+        listening.onChange(model.unitProperty(), unit -> show(model.activeProperty().get()));
+        listening.onChange(model.typedProperty(), typed -> typed());
+        listening.onChange(model.surveyProperty(), survey -> chosen());
+    }
+
+    /** Lets a keyboard do what the pad does, wherever the focus is in that part of the screen. */
+    void listenIn(Parent part) {
+        PadKeyboard.listen(part, pad);
+    }
+
+    private static PadWords words(Wording wording) {
+        return new PadWords(wording.text("screen.pad.back"), wording.text("screen.pad.next"),
+                wording.text("screen.pad.undo"), wording.text("screen.pad.backspace"),
+                wording.text("screen.pad.decimal"), wording.text("screen.pad.fraction"),
+                wording.text("screen.pad.sign"), note -> wording.text("screen.pad.note." + note.code()));
+    }
+
+    private void show(Slot slot) {
+        if (!model.open()) {
+            pad.close();
+            getChildren().clear();
+        } else if (slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot) {
+            getChildren().setAll(numericPad);
+            pad.open(setup(slot), model.editable());
+        } else {
+            pad.close();
+            getChildren().setAll(slot instanceof Slot.TextSlot text && !SlotWords.isMaterial(slot)
+                    ? textPane(text) : choicePane(slot));
+        }
+    }
+
+    private PadSetup setup(Slot slot) {
+        char sign = wording.format().decimalSign();
+        if (slot instanceof Slot.MeasureSlot measured) {
+            Unit unit = model.unitProperty().get();
+            String step = wording.format().exact(measured.measure().step(unit));
+            List<Unit> units = measured.measure().units();
+            return new PadSetup(sign, false, unit == Unit.INCH, Optional.of(new PadSetup.Steps("\u2212" + step,
+                    "+" + step)), units.size() < 2 ? Optional.empty() : Optional.of(units.stream()
+                    .map(wording::symbol).limit(3).collect(Collectors.joining(" | "))));
+        }
+        String step = wording.format().exact(((Slot.CountSlot) slot).count().step());
+        return new PadSetup(sign, false, false, Optional.of(new PadSetup.Steps("\u2212" + step, "+" + step)),
+                Optional.empty());
+    }
+
+    private void command(PadCommand command) {
+        if (command instanceof PadCommand.Typed typed) {
+            editing = true;
+            model.typedProperty().set(typed.text());
+            editing = false;
+            if (typed.text().isEmpty()) {
+                model.clear();
+            }
+        } else if (command instanceof PadCommand.Stepped stepped) {
+            model.step(stepped.direction());
+        } else if (command instanceof PadCommand.UnitSwitched) {
+            model.switchUnit();
+        } else if (command instanceof PadCommand.Undone) {
+            model.undo();
+        } else if (command instanceof PadCommand.WentBack) {
+            model.back();
+        } else {
+            model.next();
+        }
+    }
+
+    /** A number that came from elsewhere: a step, an undo, the picture. */
+    private void typed() {
+        if (!editing && pad.setupProperty().get().isPresent()) {
+            pad.take(model.editable());
+        }
+    }
+
+    private void chosen() {
+        Slot slot = model.activeProperty().get();
+        if (!(slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot || slot instanceof Slot.TextSlot)) {
+            show(slot);
+        } else if (!editing && pad.setupProperty().get().isPresent() && model.typedProperty().get().isEmpty()) {
+            pad.take(model.editable());
+        }
+    }
+
+    private VBox choicePane(Slot slot) {
+        GridPane grid = new GridPane();
+        grid.getStyleClass().add("choices");
+        for (int i = 0; i < COLUMNS; i++) {
+            ColumnConstraints column = new ColumnConstraints();
+            column.setPercentWidth(100.0 / COLUMNS);
+            grid.getColumnConstraints().add(column);
+        }
+        List<Choice> choices = choices(slot);
+        Optional<Node> answer = model.answer(slot);
+        for (int i = 0; i < choices.size(); i++) {
+            Choice choice = choices.get(i);
+            Node node = node(slot, choice.code());
+            boolean chosen = answer.equals(Optional.of(node));
+            ActionButton button = new ActionButton(chosen ? Weight.PRIMARY : Weight.PLAIN,
+                    choice.label().in(wording.words().language()), () -> {
+                        model.set(slot, chosen && !(slot instanceof Slot.WaySlot) ? Optional.empty()
+                                : Optional.of(node));
+                        if (!chosen) {
+                            model.next();
+                        }
+                    });
+            button.setId("choice-" + choice.code());
+            button.setMaxWidth(Double.MAX_VALUE);
+            grid.add(button, i % COLUMNS, i / COLUMNS);
+        }
+        ScrollPane scroll = new ScrollPane(grid);
+        scroll.setFitToWidth(true);
+        scroll.getStyleClass().add("form-scroll");
+        VBox.setVgrow(scroll, Priority.ALWAYS);
+        VBox pane = new VBox(scroll, moves());
+        pane.getStyleClass().add("choice-pane");
+        return pane;
+    }
+
+    private List<Choice> choices(Slot slot) {
+        if (slot instanceof Slot.FlagSlot) {
+            return List.of(new Choice("yes", texts("screen.yes")), new Choice("no", texts("screen.no")));
+        }
+        if (SlotWords.isMaterial(slot)) {
+            List<Choice> materials = new ArrayList<>();
+            model.setting().register().materials().forEach((id, material) ->
+                    materials.add(new Choice(id, Texts.of(material.name(), material.name()))));
+            return materials;
+        }
+        return SlotWords.choices(slot);
+    }
+
+    private Texts texts(String key) {
+        return Texts.of(wording.text(key), wording.text(key));
+    }
+
+    private static Node node(Slot slot, String code) {
+        return slot instanceof Slot.FlagSlot ? Node.flag(code.equals("yes")) : Node.text(code);
+    }
+
+    private VBox textPane(Slot.TextSlot slot) {
+        TextArea area = new TextArea(model.editable());
+        area.setId("text-entry");
+        area.setWrapText(true);
+        area.setAccessibleText(slot.label().in(wording.words().language()));
+        area.textProperty().addListener((property, before, now) -> {
+            editing = true;
+            if (now.isEmpty()) {
+                model.clear();
+            } else {
+                model.typedProperty().set(now);
+            }
+            editing = false;
+        });
+        VBox.setVgrow(area, Priority.ALWAYS);
+        VBox pane = new VBox(area, moves());
+        pane.getStyleClass().add("choice-pane");
+        return pane;
+    }
+
+    /** Back, undo and next, as on the pad. */
+    private HBox moves() {
+        ActionButton next = new ActionButton(Weight.PRIMARY, wording.text("screen.pad.next"), model::next);
+        next.setId("entry-next");
+        ActionButton undo = new ActionButton(Weight.PLAIN, wording.text("screen.pad.undo"), model::undo);
+        undo.setId("entry-undo");
+        ActionButton back = new ActionButton(Weight.PLAIN, wording.text("screen.pad.back"), model::back);
+        back.setId("entry-back");
+        HBox moves = new HBox(back, undo, next);
+        moves.getStyleClass().add("moves");
+        for (Button button : List.of(back, undo, next)) {
+            button.setMaxWidth(Double.MAX_VALUE);
+            button.setPrefWidth(100);
+            HBox.setHgrow(button, Priority.ALWAYS);
+        }
+        return moves;
+    }
+}

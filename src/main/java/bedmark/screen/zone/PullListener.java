@@ -1,0 +1,22 @@
+package bedmark.screen.zone;
+
+import bedmark.picture.Snap;
+
+/** Hears what a person does on the zone picture. */
+public interface PullListener {
+
+    /** A station was touched: it is the one in hand now. */
+    void touched(int station);
+
+    /**
+     * The bed was pulled to a depth. Comes again and again while the finger moves, and the last time with
+     * {@link Phase#RELEASED}; then the depth is the person's.
+     */
+    void pulled(Grip grip, Snap.Stepped depth, Phase phase);
+
+    /** How far a pull is. */
+    enum Phase {
+        MOVING,
+        RELEASED
+    }
+}

@@ -1,0 +1,221 @@
+package bedmark.screen.zone;
+
+import bedmark.document.Node;
+import bedmark.document.Pointer;
+import bedmark.quantity.Quality;
+import bedmark.quantity.Quantity;
+import bedmark.quantity.Unit;
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.FieldBox;
+import bedmark.screen.part.Judgement;
+import bedmark.screen.part.QualityButton;
+import bedmark.screen.part.Weight;
+import bedmark.screen.theme.Icon;
+import bedmark.wording.Wording;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import javafx.scene.control.ContentDisplay;
+import javafx.scene.control.Label;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.VBox;
+
+/** One row of the form: its name, the boxes of its cells, the mark of its reading, and below it what is to be said. */
+final class RowView extends VBox {
+    private final SlotRow row;
+    private final ZoneModel model;
+    private final Wording wording;
+    private final SlotWords words;
+    private final Map<Pointer, FieldBox> boxes = new LinkedHashMap<>();
+    private final Label message = new Label();
+    private Optional<QualityButton> quality = Optional.empty();
+
+    RowView(SlotRow row, ZoneModel model, Wording wording) {
+        this.row = row;
+        this.model = model;
+        this.wording = wording;
+        this.words = new SlotWords(wording, model.setting().register());
+        getStyleClass().add("reading-row");
+        Label name = new Label(name());
+        name.getStyleClass().add("name");
+        message.getStyleClass().add("message");
+        message.setWrapText(true);
+        message.managedProperty().bind(message.visibleProperty());
+        message.visibleProperty().bind(message.textProperty().isNotEmpty());
+        message.setMinHeight(USE_PREF_SIZE);
+        HBox head = new HBox(name);
+        head.getStyleClass().add("row");
+        HBox.setHgrow(name, Priority.ALWAYS);
+        name.setMaxWidth(Double.MAX_VALUE);
+        name.setWrapText(true);
+        getChildren().addAll(head, cells(), message);
+        row.growing().filter(place -> model.open()).ifPresent(place -> getChildren().add(lineButtons(place)));
+        update();
+    }
+
+    SlotRow row() {
+        return row;
+    }
+
+    private String name() {
+        if (row.line().isPresent()) {
+            return wording.text("screen.zone.line." + row.field().key(), row.line().get());
+        }
+        return words.label(row.slots().get(0));
+    }
+
+    private javafx.scene.Node cells() {
+        row.slots().forEach(slot -> boxes.put(slot.where(), box(slot)));
+        quality = row.slots().stream().filter(slot -> slot instanceof Slot.MeasureSlot measured && measured.markable())
+                .findFirst().map(this::quality);
+        List<FieldBox> cells = new ArrayList<>(boxes.values());
+        if (cells.size() == 4) {
+            GridPane grid = new GridPane();
+            grid.getStyleClass().add("cells");
+            for (int i = 0; i < cells.size(); i++) {
+                GridPane.setHgrow(cells.get(i), Priority.ALWAYS);
+                cells.get(i).setPrefWidth(100);
+                grid.add(cells.get(i), i % 2, i / 2);
+            }
+            return grid;
+        }
+        HBox line = new HBox();
+        line.getStyleClass().add("row");
+        cells.forEach(cell -> HBox.setHgrow(cell, Priority.ALWAYS));
+        if (cells.size() == 2) {
+            cells.get(0).getStyleClass().add("narrow");
+            HBox.setHgrow(cells.get(0), Priority.NEVER);
+        }
+        line.getChildren().addAll(cells);
+        quality.ifPresent(line.getChildren()::add);
+        return line;
+    }
+
+    private FieldBox box(Slot slot) {
+        FieldBox box = new FieldBox(name() + ", " + words.label(slot), () -> model.activate(slot));
+        box.setId("slot" + slot.where().toString().replace('/', '-'));
+        if (!(slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot)) {
+            box.getStyleClass().add("words");
+        }
+        return box;
+    }
+
+    private QualityButton quality(Slot slot) {
+        QualityButton button = new QualityButton(Quality.MEASURED, mark -> wording.text("screen.quality." + mark.code()),
+                mark -> {
+                    model.activate(slot);
+                    model.mark(mark);
+                    update();
+                });
+        button.setId("quality" + slot.where().toString().replace('/', '-'));
+        return button;
+    }
+
+    private HBox lineButtons(Pointer place) {
+        ActionButton add = ActionButton.with(Icon.PLUS, ContentDisplay.LEFT, Weight.PLAIN,
+                wording.text("screen.zone.add." + row.field().key()),
+                () -> model.addLine(row.field().where()));
+        add.setId("add-" + row.field().key());
+        ActionButton remove = ActionButton.with(Icon.CROSS, ContentDisplay.LEFT, Weight.PLAIN,
+                wording.text("screen.zone.remove-line"), () -> model.removeLine(row.place()));
+        remove.setId("remove-" + row.field().key());
+        HBox buttons = new HBox(add, remove);
+        buttons.getStyleClass().add("row");
+        for (ActionButton button : List.of(add, remove)) {
+            button.getStyleClass().add("secondary-target");
+            button.setMaxWidth(Double.MAX_VALUE);
+            HBox.setHgrow(button, Priority.ALWAYS);
+        }
+        return buttons;
+    }
+
+    /** Shows what the survey holds now. */
+    void update() {
+        for (Slot slot : row.slots()) {
+            update(slot, boxes.get(slot.where()));
+        }
+        boolean here = row.slots().stream().anyMatch(slot -> slot.equals(model.activeProperty().get()));
+        Optional<ZoneModel.Note> note = here ? model.noteProperty().get() : Optional.empty();
+        message.setText(note.map(this::sentence).orElse(""));
+        boolean wrong = note.filter(RowView::isWrong).isPresent();
+        message.getStyleClass().setAll("message", wrong ? "wrong" : "questioned");
+    }
+
+    private void update(Slot slot, FieldBox box) {
+        boolean active = slot.equals(model.activeProperty().get());
+        box.activeProperty().set(active);
+        String typed = model.typedProperty().get();
+        Unit unit = unit(slot);
+        if (active && !typed.isEmpty()) {
+            box.valueProperty().set(typed);
+            box.unitProperty().set(unit == null ? "" : wording.symbol(unit));
+        } else {
+            Optional<Node> answer = model.answer(slot);
+            SlotWords.Shown shown = words.shown(slot, answer);
+            box.valueProperty().set(shown.value());
+            box.unitProperty().set(shown.unit().isEmpty() && unit != null ? wording.symbol(unit) : shown.unit());
+            if (shown.value().isEmpty() && box.getStyleClass().contains("words")) {
+                box.unitProperty().set(row.slots().size() > 1 ? words.label(slot) : "");
+            }
+        }
+        box.freshProperty().set(active && typed.isEmpty() && !box.valueProperty().get().isEmpty());
+        box.ghostProperty().set(row.slots().size() == 1 || slot.where().last().equals("depth")
+                ? words.ghost(slot, model.lastAnswer(slot), unit) : "");
+        box.judgementProperty().set(judged(slot, active));
+        quality.filter(button -> slot instanceof Slot.MeasureSlot measured && measured.markable()).ifPresent(button -> {
+            Optional<Quality> mark = model.answer(slot).flatMap(SlotWords::quantity).flatMap(Quantity::quality);
+            button.setVisible(mark.isPresent());
+            mark.ifPresent(button.qualityProperty()::set);
+        });
+    }
+
+    private Unit unit(Slot slot) {
+        if (!(slot instanceof Slot.MeasureSlot measured)) {
+            return null;
+        }
+        return slot.equals(model.activeProperty().get()) ? model.unitProperty().get()
+                : model.answer(slot).flatMap(SlotWords::quantity).map(Quantity::unit)
+                        .orElse(measured.measure().unit(model.unitsProperty().get()));
+    }
+
+    private Judgement judged(Slot slot, boolean active) {
+        if (!active) {
+            return Judgement.NONE;
+        }
+        return model.noteProperty().get().map(note -> isWrong(note) ? Judgement.WRONG : Judgement.QUESTIONED)
+                .orElse(Judgement.NONE);
+    }
+
+    private static boolean isWrong(ZoneModel.Note note) {
+        return note instanceof ZoneModel.Note.NoNumber || note instanceof ZoneModel.Note.IsolateFirst
+                || note instanceof ZoneModel.Note.Judged judged
+                && judged.judgement() instanceof bedmark.form.Judgement.Refusal;
+    }
+
+    private String sentence(ZoneModel.Note note) {
+        if (note instanceof ZoneModel.Note.Judged judged) {
+            return wording.sentence(judged.judgement(), judged.field());
+        } else if (note instanceof ZoneModel.Note.NoNumber none) {
+            return wording.sentence(none.reason());
+        } else if (note instanceof ZoneModel.Note.Gap gap) {
+            return wording.text("screen.zone.gap", gap.field().head().label().in(wording.words().language()));
+        }
+        return wording.text("screen.zone.isolate-first");
+    }
+
+    /** Puts the focus on the active box, if it is in this row. */
+    void focusActive() {
+        Optional.ofNullable(model.activeProperty().get()).map(slot -> boxes.get(slot.where()))
+                .ifPresent(FieldBox::requestFocus);
+    }
+
+    /** Whether the active cell is in this row. */
+    boolean holdsActive() {
+        return Optional.ofNullable(model.activeProperty().get()).filter(slot -> boxes.containsKey(slot.where()))
+                .isPresent();
+    }
+}

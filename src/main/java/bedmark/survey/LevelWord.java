@@ -1,0 +1,35 @@
+package bedmark.survey;
+
+import bedmark.document.Branch;
+import bedmark.document.Refused;
+import bedmark.engine.verdict.Level;
+import java.util.List;
+
+/**
+ * Judges one survey in a word, for lists: the level of its verdict by the register that it was made with. Keeps the
+ * assessor of the register that it met last, since lists hold many surveys of one register.
+ */
+public final class LevelWord {
+    private Branch known = Branch.EMPTY;
+    private Assessor assessor = new Assessor(Register.empty());
+
+    /**
+     * The level's word.
+     *
+     * @param survey   the survey's document
+     * @param register an object with the {@code plant}
+     * @return {@code incomplete} where the survey can't be judged
+     */
+    public synchronized String of(Branch survey, Branch register) {
+        try {
+            Branch plant = register.branch("plant").orElse(Branch.EMPTY);
+            if (plant != known) {
+                assessor = new Assessor(new Register(plant));
+                known = plant;
+            }
+            return assessor.assess(new Survey(survey), List.of()).level().code();
+        } catch (Refused e) {
+            return Level.INCOMPLETE.code();
+        }
+    }
+}

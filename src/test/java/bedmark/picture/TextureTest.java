@@ -1,0 +1,49 @@
+package bedmark.picture;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import org.junit.jupiter.api.Test;
+
+class TextureTest {
+    /** A region with a notch, so that strokes must stop and go on. */
+    private static final List<Point> NOTCHED = List.of(new Point(0, 0), new Point(40, 0), new Point(50, 40),
+            new Point(60, 0), new Point(100, 0), new Point(100, 60), new Point(0, 60));
+
+    @Test
+    void strokesLieInTheRegion() {
+        List<Mark.Segment> strokes = Texture.hatch(NOTCHED, 7);
+        assertFalse(strokes.isEmpty());
+        for (Mark.Segment stroke : strokes) {
+            for (double share : new double[] {0.01, 0.25, 0.5, 0.75, 0.99}) {
+                Point point = new Point(stroke.from().x() + share * (stroke.to().x() - stroke.from().x()),
+                        stroke.from().y() + share * (stroke.to().y() - stroke.from().y()));
+                assertTrue(Texture.holds(NOTCHED, point), () -> "outside: " + point);
+            }
+        }
+    }
+
+    @Test
+    void strokesCoverTheRegionEvenly() {
+        double length = Texture.hatch(NOTCHED, 0.5).stream().mapToDouble(stroke -> stroke.from().distance(stroke.to()))
+                .sum();
+        double area = 100 * 60 - 20 * 40 / 2.0;
+        assertEquals(area, length * 0.5, area * 0.01);
+    }
+
+    @Test
+    void dotsLieInTheRegionAndKeepOffItsEdge() {
+        List<Point> dots = Texture.grain(NOTCHED, 8, 1);
+        assertFalse(dots.isEmpty());
+        assertTrue(dots.stream().allMatch(dot -> Texture.holds(NOTCHED, dot) && dot.x() >= 2 && dot.y() <= 58));
+    }
+
+    @Test
+    void textureStaysWhenTheRegionGrows() {
+        List<Point> small = new Box(0, 30, 100, 30).corners();
+        List<Point> large = new Box(0, 0, 100, 60).corners();
+        assertTrue(Texture.grain(large, 8, 1).containsAll(Texture.grain(small, 8, 1)));
+    }
+}

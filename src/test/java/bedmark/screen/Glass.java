@@ -1,0 +1,105 @@
+package bedmark.screen;
+
+import bedmark.screen.theme.Density;
+import bedmark.screen.theme.Light;
+import bedmark.screen.theme.Theme;
+import java.awt.image.BufferedImage;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.concurrent.Callable;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.ExecutionException;
+import java.util.function.Supplier;
+import javafx.application.Platform;
+import javafx.geometry.Rectangle2D;
+import javafx.scene.Parent;
+import javafx.scene.Scene;
+import javafx.scene.SnapshotParameters;
+import javafx.scene.image.PixelReader;
+import javafx.scene.image.WritableImage;
+import javafx.scene.paint.Color;
+import javafx.scene.transform.Transform;
+import javafx.stage.Stage;
+import javax.imageio.ImageIO;
+import org.testfx.api.FxToolkit;
+
+/** Shows parts on a headless glass, for tests that look at them. */
+public final class Glass {
+    private static final Path PICTURES = Path.of("target", "pictures");
+
+    private Glass() {
+    }
+
+    /** Runs on the screen's thread, and hands back what came out or went wrong there. */
+    public static <T> T on(Callable<T> work) throws Exception {
+        FxToolkit.registerPrimaryStage();
+        CompletableFuture<T> result = new CompletableFuture<>();
+        Platform.runLater(() -> {
+            try {
+                result.complete(work.call());
+            } catch (Throwable e) {
+                result.completeExceptionally(e);
+            }
+        });
+        try {
+            return result.get();
+        } catch (ExecutionException e) {
+            if (e.getCause() instanceof Error error) {
+                throw error;
+            }
+            throw (Exception) e.getCause();
+        }
+    }
+
+    /** A dressed and laid out scene on a stage. */
+    public static Scene show(Parent root, Light light, Density density, double width, double height) {
+        Stage stage = new Stage();
+        Scene scene = new Scene(root, width, height);
+        Theme.apply(scene, light, density);
+        stage.setScene(scene);
+        stage.show();
+        root.applyCss();
+        root.layout();
+        return scene;
+    }
+
+    /** Writes a scene into {@code target/pictures}, with so many pixels for each logical one. */
+    public static void picture(String name, Supplier<Parent> root, Light light, Density density, double width,
+                               double height, double scale) throws Exception {
+        on(() -> {
+            Scene scene = show(root.get(), light, density, width, height);
+            write(PICTURES.resolve(name + ".png"), scene, scale);
+            scene.getWindow().hide();
+            return name;
+        });
+    }
+
+    /** Writes what a scene shows into a file. */
+    static void write(Path file, Scene scene) throws IOException {
+        write(file, scene, 1);
+    }
+
+    private static void write(Path file, Scene scene, double scale) throws IOException {
+        scene.getRoot().layout();
+        SnapshotParameters parameters = new SnapshotParameters();
+        parameters.setTransform(Transform.scale(scale, scale));
+        parameters.setViewport(new Rectangle2D(0, 0, scene.getWidth() * scale, scene.getHeight() * scale));
+        parameters.setFill(Color.MAGENTA);
+        write(file, scene.getRoot().snapshot(parameters, null));
+    }
+
+    private static void write(Path file, WritableImage image) throws IOException {
+        int width = (int) image.getWidth();
+        int height = (int) image.getHeight();
+        PixelReader pixels = image.getPixelReader();
+        BufferedImage copy = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB);
+        for (int y = 0; y < height; y++) {
+            for (int x = 0; x < width; x++) {
+                copy.setRGB(x, y, pixels.getArgb(x, y));
+            }
+        }
+        Files.createDirectories(file.toAbsolutePath().getParent());
+        ImageIO.write(copy, "png", file.toFile());
+    }
+}

@@ -1,0 +1,133 @@
+package bedmark.screen;
+
+import static org.junit.jupiter.api.Assertions.assertNotNull;
+
+import bedmark.index.Store;
+import java.nio.file.Path;
+import java.time.Clock;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import java.util.concurrent.TimeUnit;
+import java.util.concurrent.TimeoutException;
+import javafx.application.Platform;
+import javafx.scene.Node;
+import javafx.scene.control.Labeled;
+import javafx.scene.input.KeyCode;
+import javafx.stage.Stage;
+import org.testfx.api.FxRobot;
+import org.testfx.api.FxToolkit;
+import org.testfx.util.WaitForAsyncUtils;
+
+/** The whole app on a store of its own, driven as a person drives it: by clicks and keys. */
+public final class TabletApp implements AutoCloseable {
+    private static final int PATIENCE_SECONDS = 30;
+
+    private final Store store;
+    private final FxRobot robot = new FxRobot();
+    private Workplace workplace;
+    private Shell shell;
+
+    /**
+     * Opens the app.
+     *
+     * @param exportFolder what the person chooses when asked for a folder
+     */
+    public TabletApp(Path folder, Optional<Path> samples, Path exportFolder, Clock clock,
+                     double width, double height) throws Exception {
+        store = Store.open(folder, BedmarkApp.options(clock));
+        Stage stage = FxToolkit.registerPrimaryStage();
+        Glass.on(() -> {
+            workplace = new Workplace(store, clock, Platform::runLater, (title, begin) -> Optional.of(exportFolder),
+                    samples);
+            shell = new Shell(workplace, width, height);
+            stage.setScene(shell.scene());
+            stage.sizeToScene();
+            stage.show();
+            return null;
+        });
+        settle();
+    }
+
+    public Workplace workplace() {
+        return workplace;
+    }
+
+    public Shell shell() {
+        return shell;
+    }
+
+    public FxRobot robot() {
+        return robot;
+    }
+
+    /** Waits until everything that was done is saved and drawn. */
+    public void settle() throws TimeoutException {
+        WaitForAsyncUtils.waitForFxEvents();
+        WaitForAsyncUtils.waitFor(PATIENCE_SECONDS, TimeUnit.SECONDS,
+                () -> workplace.scribe().waitingProperty().get() == 0);
+        WaitForAsyncUtils.waitForFxEvents();
+    }
+
+    /** Waits until something is so. */
+    public void until(Callable<Boolean> so) throws TimeoutException {
+        WaitForAsyncUtils.waitFor(PATIENCE_SECONDS, TimeUnit.SECONDS, so);
+        settle();
+    }
+
+    public void click(String id) throws TimeoutException {
+        robot.clickOn(node(id));
+        settle();
+    }
+
+    /** Types with the keyboard, wherever the focus is. */
+    public void type(String text) throws TimeoutException {
+        robot.write(text);
+        settle();
+    }
+
+    public void press(KeyCode... keys) throws TimeoutException {
+        robot.push(keys);
+        settle();
+    }
+
+    /** The node with an id. */
+    public Node node(String id) {
+        Node node = shell.scene().lookup("#" + id);
+        assertNotNull(node, "there is nothing called " + id);
+        return node;
+    }
+
+    /** Whether there is a node with that id. */
+    public boolean has(String id) {
+        return shell.scene().lookup("#" + id) != null;
+    }
+
+    /** Takes a picture of the screen. */
+    public void picture(Path file) throws Exception {
+        settle();
+        Glass.on(() -> {
+            Glass.write(file, shell.scene());
+            return null;
+        });
+    }
+
+    /** The words of the label or button with an id. */
+    public String words(String id) {
+        return ((Labeled) node(id)).getText();
+    }
+
+    @Override
+    public void close() {
+        try {
+            Glass.on(() -> {
+                shell.close();
+                return null;
+            });
+            settle();
+            workplace.close();
+            FxToolkit.cleanupStages();
+        } catch (Exception e) {
+            throw new IllegalStateException("the app did not close", e);
+        }
+    }
+}

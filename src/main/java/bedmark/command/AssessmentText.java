@@ -2,6 +2,7 @@ package bedmark.command;
 
 import bedmark.command.AssessCommand.Judged;
 import bedmark.document.Branch;
+import bedmark.document.Refused;
 import bedmark.form.FieldForm;
 import bedmark.form.Texts;
 import bedmark.json.FormReader;
@@ -63,10 +64,19 @@ final class AssessmentText {
                 + " > " + register.conveyorOf(transfer).tag() + (round.isEmpty() ? "" : "  [" + round + "]") + revision;
     }
 
-    /** The form that the survey was made with; a bundle that does not bring it is told without its labels. */
+    /** The form that the survey was made with; without a whole one the readings go by their keys. */
     private static FieldForm form(Survey survey, List<Branch> forms) {
         Optional<String> id = survey.document().branch("form").flatMap(form -> form.text("id"));
         return forms.stream().filter(form -> id.isPresent() && form.text("id").equals(id)).findFirst()
-                .map(FormReader::read).orElseGet(() -> new FieldForm("none", 1, Texts.of("", ""), List.of()));
+                .flatMap(AssessmentText::whole)
+                .orElseGet(() -> new FieldForm("none", 1, Texts.of("", ""), List.of()));
+    }
+
+    private static Optional<FieldForm> whole(Branch form) {
+        try {
+            return Optional.of(FormReader.read(form));
+        } catch (Refused e) {
+            return Optional.empty();
+        }
     }
 }

@@ -58,7 +58,8 @@ final class Appraisal {
             Observations then = new Observations(today, feed);
             return findings(then, then.all(), loadAtDesign);
         }).orElse(List.of());
-        List<String> required = new Requirements(zone).missing(today.materialDrag());
+        Requirements requirements = new Requirements(zone);
+        List<String> required = requirements.required(today.materialDrag());
         List<Deduced<?>> numbers = new ArrayList<>(results.values());
         numbers.addAll(today.methods().values());
         numbers.addAll(observed.values());
@@ -66,11 +67,11 @@ final class Appraisal {
         List<Assumption> assumptions = new Assumptions(today).all(profile, design.isPresent());
         lowerBound(findings, loadToday).ifPresent(assumptions::add);
         Level level = level(findings, required);
-        return new Assessment(today.materialDrag().value().map(drag -> today.method()), estimates(Result.class, results),
-                estimates(DragMethod.class, today.methods()), energyKind(), profile, level,
-                design.map(feed -> level(atDesign, required)), findings, atDesign, allowedDepths(),
+        return new Assessment(today.materialDrag().value().map(drag -> today.method()),
+                estimates(Result.class, results), estimates(DragMethod.class, today.methods()), energyKind(), profile,
+                level, design.map(feed -> level(atDesign, required)), findings, atDesign, allowedDepths(),
                 new Remedies(zone.zone(), zone.settings()).all(), assumptions,
-                Requirements.missing(required, numbers), required, zone.sidesWithoutSeals(),
+                requirements.all(required, numbers), required, zone.sidesWithoutSeals(),
                 today.skirtPower().value().map(tape::shares).orElse(List.<Share>of()), leading(), repeat(findings));
     }
 

@@ -10,6 +10,7 @@ import bedmark.engine.verdict.Component;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Remedy;
+import java.util.ArrayList;
 import java.util.Collections;
 import java.util.Comparator;
 import java.util.EnumMap;
@@ -82,6 +83,15 @@ public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> resu
     /** The number, where it could be computed. */
     public Optional<Estimate> get(Result result) {
         return Optional.ofNullable(results.get(result));
+    }
+
+    /** The same assessment with one more thing that was taken for granted before the engine saw the zone. */
+    public Assessment with(Assumption assumption) {
+        List<Assumption> more = new ArrayList<>(assumptions);
+        more.add(assumption);
+        return new Assessment(method, results, methods, energyKind, profile, level, levelAtDesignFeed, findings,
+                findingsAtDesign, allowedDepths, remedies, more, missing, missingRequired, sidesWithoutSeals,
+                powerShares, leading, repeat);
     }
 
     /** The depth that may not be overstepped at the board and the rule that sets it, where one is known. */

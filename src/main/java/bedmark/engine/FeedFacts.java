@@ -64,13 +64,14 @@ final class FeedFacts {
         Deduced<Uncertain> read = zone.number(Datum.THROUGHPUT);
         return Deduced.perhaps(() -> read.get().value() == 0 ? Optional.empty()
                 : Optional.of(new FeedFacts(zone, scaled(zone, design.get().over(read.get())), design)),
-                design, read, zone.profile());
+                design, read, zone.profile(), zone.section());
     }
 
     /** The bed with its area at each station multiplied. */
     static Deduced<Profile> scaled(ZoneFacts zone, Uncertain factor) {
         return Deduced.from(() -> zone.profile().get().map(level ->
-                zone.section().get().level(zone.section().get().area(level).times(factor))), zone.profile());
+                zone.section().get().level(zone.section().get().area(level).times(factor))),
+                zone.profile(), zone.section());
     }
 
     /** The method in use: the site's, else the tabulated factor where the material has one, else Rankine's. */

@@ -1,5 +1,6 @@
 package bedmark.engine;
 
+import bedmark.engine.bed.Section;
 import bedmark.engine.flow.BoardPlacement;
 import bedmark.engine.flow.MaximumBeltSpeed;
 import bedmark.engine.seal.SealCondition;
@@ -22,7 +23,7 @@ final class Observations {
 
     /**
      * @param today as it was read
-     * @param feed  the feed to judge: today's or another
+     * @param feed  the feed to judge: today's, or a stated one beside a stated one of today
      */
     Observations(FeedFacts today, FeedFacts feed) {
         zone = feed.zone();
@@ -86,8 +87,7 @@ final class Observations {
      */
     private Deduced<Uncertain> runningShareAtLeast() {
         boolean rises = zone.sources().numberOr(Datum.INCLINE, 0).value() >= 0;
-        if (!zone.number(Datum.RUNNING_POWER).isKnown() || !rises || !today.statedFlow().isKnown()
-                || !feed.statedFlow().isKnown()
+        if (!zone.number(Datum.RUNNING_POWER).isKnown() || !rises
                 || feed.statedFlow().get().value() < today.statedFlow().get().value()) {
             return Deduced.nothing();
         }
@@ -121,8 +121,10 @@ final class Observations {
 
     private Deduced<Uncertain> freeEdge() {
         Deduced<Uncertain> belt = zone.number(Datum.BELT_WIDTH);
+        Deduced<Uncertain> trough = zone.number(Datum.TROUGH_ANGLE);
         return Deduced.from(() -> BoardPlacement.freeEdge(belt.get(), zone.centreRoll().get(), zone.spacing().get(),
-                zone.section().get().wingRun()), belt, zone.centreRoll(), zone.spacing(), zone.section());
+                Section.wingRun(zone.spacing().get(), zone.centreRoll().get(), trough.get())),
+                belt, zone.centreRoll(), zone.spacing(), trough);
     }
 
     private Deduced<Double> tableSpeed() {

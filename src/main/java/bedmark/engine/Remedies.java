@@ -42,7 +42,7 @@ final class Remedies {
 
     /** The remedies that the readings support: first those that may be ranked, the greatest saving ahead. */
     List<Remedy> all() {
-        if (!now.skirtPower().isKnown()) {
+        if (!now.skirtPower().isKnown() || !zone.section().isKnown()) {
             return List.of();
         }
         return Stream.of(freeBed(), lowerFeed(), widerBoards(), shorterZone(),
@@ -67,7 +67,7 @@ final class Remedies {
         return Optional.of(remedy("free-bed", OptionalDouble.of(1), "1", then, 1, true));
     }
 
-    /** The feed is lowered until nothing that it brings about warns any more; the belt runs longer for the same tonnes. */
+    /** The feed is lowered until what it brings about warns no more; the belt runs longer for the same tonnes. */
     private Optional<Remedy> lowerFeed() {
         double factor = depthFactor();
         if (broken.contains(Rule.FLOW_OVER_CAPACITY)) {

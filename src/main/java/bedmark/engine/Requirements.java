@@ -1,6 +1,5 @@
 package bedmark.engine;
 
-import java.util.ArrayList;
 import java.util.Collection;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -18,18 +17,14 @@ final class Requirements {
      * The places of the required readings that are missing. A material needs a tabulated factor or an angle of repose
      * besides, since without one of them there is no drag to judge.
      */
-    List<String> missing(Deduced<?> materialDrag) {
+    List<String> required(Deduced<?> materialDrag) {
         Set<String> missing = new LinkedHashSet<>(zone.zone().unfinished());
         missing.addAll(zone.length().missing());
-        if (missing.stream().noneMatch(place -> place.startsWith("/readings/beltTiming")
-                || place.startsWith("/readings/pulleySpeed"))) {
-            missing.addAll(zone.beltSpeed().missing());
-        }
+        missing.addAll(zone.beltSpeed().missing());
         missing.addAll(zone.spacing().missing());
         missing.addAll(zone.height().missing());
-        if (zone.zone().stations().isEmpty() && missing.stream().noneMatch(place ->
-                place.startsWith("/readings/bedDepths"))) {
-            missing.add("/readings/bedDepths");
+        if (zone.zone().stations().isEmpty()) {
+            missing.add(ZoneFacts.DEPTHS);
         }
         missing.addAll(zone.sealDrag().missing());
         missing.addAll(zone.number(Datum.BELT_WIDTH).missing());
@@ -43,13 +38,28 @@ final class Requirements {
             missing.add(Datum.SKIRT_FRICTION_FACTOR.pointer());
         }
         missing.addAll(materialDrag.missing());
-        return List.copyOf(missing);
+        return withoutTheWhole(missing);
     }
 
     /** The required ones, then what else any of the numbers waits for. */
-    static List<String> missing(List<String> required, Collection<? extends Deduced<?>> numbers) {
+    List<String> all(List<String> required, Collection<? extends Deduced<?>> numbers) {
         Set<String> missing = new LinkedHashSet<>(required);
         numbers.forEach(number -> missing.addAll(number.missing()));
-        return new ArrayList<>(missing);
+        return withoutTheWhole(missing);
+    }
+
+    /** Where a row or a part was begun, it is that one which is missing, and not the whole again. */
+    private List<String> withoutTheWhole(Set<String> missing) {
+        if (isBegun(ZoneFacts.DEPTHS + "/")) {
+            missing.remove(ZoneFacts.DEPTHS);
+        }
+        if (isBegun("/readings/beltTiming/") || isBegun("/readings/pulleySpeed/")) {
+            missing.remove(Datum.BELT_SPEED.pointer());
+        }
+        return List.copyOf(missing);
+    }
+
+    private boolean isBegun(String beginning) {
+        return zone.zone().unfinished().stream().anyMatch(place -> place.startsWith(beginning));
     }
 }

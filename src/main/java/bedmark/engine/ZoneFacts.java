@@ -11,11 +11,15 @@ import bedmark.engine.seal.SealDrag;
 import bedmark.engine.seal.SealSegment;
 import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Uncertain;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Stream;
 
 /** What follows from a zone's readings whatever the feed: geometry, speed, seals, capacity, design. */
 final class ZoneFacts {
+    /** The place of the bed depths. */
+    static final String DEPTHS = "/readings/bedDepths";
+
     private static final double SHARE_OF_WIDTH = 0.10;
 
     private final Sources sources;
@@ -43,9 +47,10 @@ final class ZoneFacts {
         sealDrag = findSealDrag();
         Deduced<Uncertain> usable = Deduced.perhaps(() -> OpenBelt.usableWidth(number(Datum.BELT_WIDTH).get()),
                 number(Datum.BELT_WIDTH));
-        capacityArea = Deduced.from(() -> OpenBelt.area(usable.get(), centreRoll.get(),
+        Deduced<Uncertain> centre = isFlat() ? usable : centreRoll;
+        capacityArea = Deduced.from(() -> OpenBelt.area(usable.get(), centre.get(),
                 number(Datum.TROUGH_ANGLE).get(), number(Datum.SURCHARGE_ANGLE).get()),
-                usable, centreRoll, number(Datum.TROUGH_ANGLE), number(Datum.SURCHARGE_ANGLE));
+                usable, centre, number(Datum.TROUGH_ANGLE), number(Datum.SURCHARGE_ANGLE));
         designDepth = findDesignDepth();
         referenceDepth = number(Datum.DESIGN_BED_DEPTH).or(Deduced.from(
                 () -> designDepth.get().max(number(Datum.BELT_WIDTH).get().times(SHARE_OF_WIDTH)),
@@ -175,16 +180,31 @@ final class ZoneFacts {
     }
 
     private Deduced<Profile> findProfile() {
-        Deduced<List<Station>> stations = zone().stations().isEmpty()
-                ? Deduced.waitingFor("/readings/bedDepths") : Deduced.known(zone().stations());
+        List<Station> stations = zone().stations();
+        List<Deduced<Uncertain>> levels = stations.stream().map(this::level).toList();
+        List<Deduced<?>> inputs = new ArrayList<>(levels);
+        inputs.add(length());
+        if (stations.isEmpty()) {
+            inputs.add(Deduced.waitingFor(DEPTHS));
+        }
         return Deduced.from(() -> new Profile(length().get(),
-                stations.get().stream().map(station -> sources.take(station.position())).toList(),
-                stations.get().stream().map(this::level).toList()),
-                length(), stations, height, section);
+                stations.stream().map(station -> sources.take(station.position())).toList(),
+                levels.stream().map(Deduced::get).toList()), inputs.toArray(Deduced<?>[]::new));
     }
 
-    private Uncertain level(Station station) {
-        return section.get().level(sources.take(station.raw()), station.method(), height.get());
+    /** The level after a reading: one at the board needs no section, one from the board's top only below the board. */
+    private Deduced<Uncertain> level(Station station) {
+        Uncertain raw = sources.take(station.raw());
+        return switch (station.method()) {
+            case AT_BOARD, WEAR_LINE -> Deduced.known(raw);
+            case AT_CENTRE -> Deduced.from(() -> section.get().levelOfCentreDepth(raw), section);
+            case FROM_BOARD_TOP -> {
+                Deduced<Uncertain> depth = Deduced.from(() -> height.get().minus(raw), height);
+                boolean below = depth.value().filter(known -> known.value() < 0).isPresent();
+                yield below ? Deduced.from(() -> section.get().levelUnderBoardLine(raw.minus(height.get())), section)
+                        : depth;
+            }
+        };
     }
 
     private Deduced<Uncertain> findSealDrag() {

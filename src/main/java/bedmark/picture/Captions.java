@@ -22,8 +22,8 @@ import java.util.function.DoubleFunction;
  * @param sectionNote  under the cross-section: the seals, in words
  */
 public record Captions(String feed, String beltSpeed, String boardTop, String boardTopWord, String zoneLength,
-                       String limit, String limitWord, DoubleFunction<String> heights, Optional<String> prompt, String clearWidth,
-                       String sectionTitle, String sectionNote) {
+                       String limit, String limitWord, DoubleFunction<String> heights, Optional<String> prompt,
+                       String clearWidth, String sectionTitle, String sectionNote) {
     public Captions {
         Objects.requireNonNull(feed);
         Objects.requireNonNull(beltSpeed);

@@ -94,10 +94,6 @@ final class Draft {
         write(text, style, centre - width(text, style) / 2, middle);
     }
 
-    void writeRight(String text, Style style, double right, double middle) {
-        write(text, style, right - width(text, style), middle);
-    }
-
     /** Writes a text into its box, which has that much padding at the left and right. */
     void write(String text, Style style, Box box, double padding, Optional<Mark.Plate> plate) {
         TextMeasure.Extent extent = extent(text, style);

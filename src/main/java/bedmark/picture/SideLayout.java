@@ -102,6 +102,11 @@ record SideLayout(Box view, SideScale scale, boolean toScale, int positionRows) 
         return 1;
     }
 
+    /** Where the top of the boards lies; at a usual place where their height is not known. */
+    double boardTop(ZoneSketch sketch) {
+        return scale.y(sketch.boards().height().orElse(scale.top() / HEADROOM));
+    }
+
     /** Middle of the row of words over the plot. */
     double headerMiddle(Draft draft) {
         return scale.plot().y() - draft.mm(GAP) - draft.mm(Draft.ROW) / 2;

@@ -52,7 +52,8 @@ final class StationMarks {
 
     List<Handle> handles() {
         double radius = draft.mm(Handle.RADIUS_MM);
-        return visible().stream().map(index -> new Handle(index, centre(index).x(), centre(index).y(), radius)).toList();
+        return visible().stream()
+                .map(index -> new Handle(index, centre(index).x(), centre(index).y(), radius)).toList();
     }
 
     /** Those that lie in the zone. */

@@ -41,7 +41,8 @@ final class Texture {
         List<Point> dots = new ArrayList<>();
         for (long row = (long) Math.ceil(top / rise); row * rise <= bottom; row++) {
             double shift = row % 2 == 0 ? 0 : spacing / 2;
-            for (long column = (long) Math.ceil((left - shift) / spacing); column * spacing + shift <= right; column++) {
+            long first = (long) Math.ceil((left - shift) / spacing);
+            for (long column = first; column * spacing + shift <= right; column++) {
                 Point dot = new Point(column * spacing + shift, row * rise);
                 if (holds(region, dot) && clear(region, dot, 2 * radius)) {
                     dots.add(dot);

@@ -130,7 +130,8 @@ public record ZoneSketch(Boards boards, Belt belt, List<Station> stations, Optio
         OptionalInt active = IntStream.range(0, stations.size()).filter(i -> stations.get(i).active()).findFirst();
         return active.isPresent() ? active : IntStream.range(0, stations.size())
                 .filter(i -> stations.get(i).depth().isPresent())
-                .reduce((a, b) -> stations.get(b).depth().getAsDouble() > stations.get(a).depth().getAsDouble() ? b : a);
+                .reduce((a, b) ->
+                        stations.get(b).depth().getAsDouble() > stations.get(a).depth().getAsDouble() ? b : a);
     }
 
     private static OptionalDouble positive(OptionalDouble number) {

@@ -7,13 +7,13 @@ import java.text.DecimalFormatSymbols;
 import java.util.Locale;
 
 /**
- * Writes numbers for people: the locale's decimal sign, narrow no-break spaces between thousands from five digits on,
+ * Writes numbers for people: the locale's decimal sign, no-break spaces between thousands from five digits on,
  * a real minus. Numbers that a person entered keep every digit; computed ones get three significant digits, no fewer
  * than their whole part, and no finer than their unit deserves.
  */
 public final class QuantityFormat {
     /** Between thousands. */
-    public static final char THOUSANDS = '\u202F';
+    public static final char THOUSANDS = '\u00A0';
     /** Between a number and its unit. */
     public static final char BEFORE_UNIT = '\u00A0';
 

@@ -3,6 +3,7 @@ package bedmark.screen;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Weight;
 import bedmark.screen.part.TopBar;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -13,9 +14,14 @@ public final class Heads {
     private Heads() {
     }
 
-    /** A head that goes on listening until {@code listening} ends. */
-    public static VBox head(Workplace workplace, Listening listening, String title, String subtitle) {
-        TopBar bar = new TopBar();
+    /**
+     * A head that goes on listening until {@code listening} ends.
+     *
+     * @param more buttons at the far right
+     */
+    public static VBox head(Workplace workplace, Listening listening, String title, String subtitle,
+                            Node... more) {
+        TopBar bar = new TopBar(more);
         bar.titleProperty().set(title);
         bar.subtitleProperty().set(subtitle);
         listening.to(SavedMark.of(workplace), bar.asideProperty()::set);

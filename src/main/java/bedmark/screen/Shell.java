@@ -86,7 +86,13 @@ public final class Shell implements Navigator {
         root.setTop(screen.head());
         root.setCenter(screen.body());
         root.setBottom(screen.foot());
-        screen.shown();
+        Screen shown = screen;
+        // The focus of the screen before is given up with the next pulse; only then does the new one keep its own.
+        workplace.screen().execute(() -> {
+            if (screen == shown) {
+                shown.shown();
+            }
+        });
     }
 
     /** Loads the demo plant where the store has none. */

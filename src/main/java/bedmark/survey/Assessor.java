@@ -6,6 +6,7 @@ import bedmark.document.Defect;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
 import bedmark.engine.Assessment;
+import bedmark.engine.Assumption;
 import bedmark.engine.Engine;
 import bedmark.engine.LoadingZone;
 import bedmark.engine.Settings;
@@ -112,7 +113,9 @@ public final class Assessor {
         int all = register.transfer(survey.transfer()).map(transfer -> register.zonesOf(transfer.conveyor()).size())
                 .orElse(zones.size());
         try {
-            return Engine.assessConveyor(zones, all - zones.size(), settings).get(0);
+            Assessment assessment = Engine.assessConveyor(zones, all - zones.size(), settings).get(0);
+            return ZoneMapping.takesDepthsAtBoard(survey)
+                    ? assessment.with(Assumption.of("depth-method-at-board")) : assessment;
         } catch (ImpossibleReading e) {
             throw refused(e);
         }

@@ -97,6 +97,12 @@ final class ZoneMapping {
         };
     }
 
+    /** Whether some depth names no method of its own and the survey none for all: then it is taken at the board. */
+    static boolean takesDepthsAtBoard(Survey survey) {
+        return !survey.readings().has(DEPTH_METHOD)
+                && survey.readings().branches("bedDepths").stream().anyMatch(row -> !row.has(DEPTH_METHOD));
+    }
+
     private LoadingZone zone() {
         Map<Datum, Reading> data = new EnumMap<>(Datum.class);
         for (Datum datum : Datum.values()) {
@@ -130,7 +136,7 @@ final class ZoneMapping {
         Branch holder = Branch.EMPTY.with(place.last(), node.get());
         Pointer base = new Pointer(place.tokens().subList(0, place.tokens().size() - 1));
         if (datum == Datum.SKIRT_POWER_BUDGET) {
-            return Optional.of(budget(below(base, () -> holder.quantity(place.last())).orElseThrow(), place));
+            return below(base, () -> holder.quantity(place.last())).flatMap(budget -> budget(budget, place));
         }
         return below(base, () -> dimension(datum)
                 .map(dimension -> holder.quantity(place.last())
@@ -139,18 +145,17 @@ final class ZoneMapping {
                         .map(value -> instruments.reading(place.toString(), value.doubleValue(), datum.instrument()))));
     }
 
-    /** A budget is a share of the rated power, or a power that is one. */
-    private Reading budget(Quantity budget, Pointer place) {
-        double share = budget.si();
-        if (budget.unit().dimension() == Dimension.POWER) {
-            double rated = below(Pointer.of("conveyor"), () -> sources.get("conveyor").quantity("ratedPower"))
+    /** A budget is a share of the rated power, or a power; one without a rated power waits for it. */
+    private Optional<Reading> budget(Quantity budget, Pointer place) {
+        Dimension dimension = budget.unit().dimension();
+        if (dimension == Dimension.POWER) {
+            return below(Pointer.of("conveyor"), () -> sources.get("conveyor").quantity("ratedPower"))
                     .map(Quantity::si).filter(power -> power > 0)
-                    .orElseThrow(() -> new Refused(Defect.at(Pointer.of("conveyor"), "key-absent", "ratedPower")));
-            share = budget.si() / rated;
-        } else if (budget.unit().dimension() != Dimension.RATIO) {
-            throw new Refused(Defect.at(place.child("unit"), "unit-of-wrong-kind", budget.unit().code()));
+                    .map(rated -> instruments.reading(place.toString(), budget.si() / rated, Instrument.EXACT));
+        } else if (dimension == Dimension.RATIO) {
+            return Optional.of(instruments.reading(place.toString(), budget.si(), Instrument.EXACT));
         }
-        return instruments.reading(place.toString(), share, Instrument.EXACT);
+        throw new Refused(Defect.at(place.child("unit"), "unit-of-wrong-kind", budget.unit().code()));
     }
 
     private Reading reading(Pointer place, Quantity quantity, Dimension dimension, Instrument instrument) {

@@ -14,6 +14,7 @@ import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -26,6 +27,10 @@ import java.util.Set;
 public final class Telling {
     /** Ratios that people say as "so many times"; the others are said in percent. */
     private static final Set<Rule> TIMES = Set.of(Rule.BED_OVER_DESIGN, Rule.BOARD_TOO_LOW_FOR_LUMPS);
+    private static final Set<Rule> ABOUT_POWER = Set.of(Rule.DRIVE_NEAR_RATING, Rule.SKIRTS_OVER_BUDGET);
+    private static final Set<Rule> ABOUT_DEPTH =
+            Set.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD, Rule.BED_BEHIND_BELT);
+    private static final Set<String> LOWER_THE_BED = Set.of("free-bed", "lower-feed", "widen-boards");
     /** The depth speaks first where several rules say the same level. */
     private static final List<Rule> FIRST = List.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD,
             Rule.FLOW_OVER_CAPACITY, Rule.DRIVE_NEAR_RATING, Rule.SKIRTS_OVER_BUDGET);
@@ -133,10 +138,18 @@ public final class Telling {
     }
 
     private Optional<Told.Figure> figure(Assessment assessment, Result result, String label, Unit unit) {
-        return assessment.get(result).map(estimate -> new Told.Figure(wording.text(label),
-                wording.format().computed(estimate.value(), unit),
-                "± " + QuantityFormat.with(wording.format().computed(2 * estimate.standardUncertainty(), unit), unit,
-                        wording.symbol(unit))));
+        return assessment.get(result).map(estimate -> {
+            String number = wording.format().computed(estimate.value(), unit);
+            return new Told.Figure(wording.text(label), number, "± " + QuantityFormat.with(
+                    spread(2 * estimate.standardUncertainty(), unit, number), unit, wording.symbol(unit)));
+        });
+    }
+
+    /** A spread with as many decimals as the number that it belongs to. */
+    private String spread(double si, Unit unit, String number) {
+        int sign = number.indexOf(wording.format().decimalSign());
+        return wording.format().exact(new BigDecimal(unit.fromSi(si))
+                .setScale(sign < 0 ? 0 : number.length() - sign - 1, RoundingMode.HALF_UP));
     }
 
     private Told.Figure leads(Assessment assessment, Component component) {
@@ -149,15 +162,21 @@ public final class Telling {
         return new Told.Figure(wording.text("figure.leads"), wording.text("figure.leads." + component.code()), share);
     }
 
+    /** What helps against the finding that leads; nothing where all is within its limits. */
     private Optional<String> action(Assessment assessment, Optional<Finding> leading) {
-        if (assessment.level() == Level.INCOMPLETE) {
-            return Optional.empty();
-        }
-        Optional<Remedy> best = assessment.remedies().stream()
+        return leading.filter(finding -> finding.level() != Level.WITHIN && assessment.level() != Level.INCOMPLETE)
+                .map(finding -> best(assessment, finding).map(this::remedy)
+                        .orElseGet(() -> wording.text("action." + finding.action())));
+    }
+
+    /** The remedy that saves most of those that help against a finding. */
+    private static Optional<Remedy> best(Assessment assessment, Finding finding) {
+        return assessment.remedies().stream()
                 .filter(remedy -> remedy.ranked() && remedy.refusedBecause().isEmpty()
-                        && remedy.savedWh().orElse(0) > 0).findFirst();
-        return best.map(this::remedy).or(() -> leading.filter(finding -> finding.level() != Level.WITHIN)
-                .map(finding -> wording.text("action." + finding.action())));
+                        && remedy.savedWh().orElse(0) > 0)
+                .filter(remedy -> ABOUT_POWER.contains(finding.rule())
+                        || ABOUT_DEPTH.contains(finding.rule()) && LOWER_THE_BED.contains(remedy.code()))
+                .findFirst();
     }
 
     /** A remedy in one sentence: what is changed, the depth that comes of it, what it saves in a year. */
@@ -166,10 +185,8 @@ public final class Telling {
         String change = remedy.change().isPresent() ? wording.percent(remedy.change().getAsDouble()) : "";
         Optional<Unit> unit = Unit.ofCode(remedy.unit());
         if (unit.isPresent() && remedy.change().isPresent()) {
-            Unit shown = unit.get().dimension() == Dimension.LENGTH ? small
-                    : wording.units().unit(unit.get().dimension());
             change = wording.computed(unit.get().toSi(BigDecimal.valueOf(remedy.change().getAsDouble())),
-                    shown);
+                    wording.units().unit(unit.get().dimension()));
         }
         String saved = remedy.savedWh().isPresent()
                 ? wording.text("action.saves", wording.text("action.megawatt-hours",

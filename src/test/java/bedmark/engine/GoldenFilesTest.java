@@ -3,6 +3,7 @@ package bedmark.engine;
 import static org.junit.jupiter.api.Assertions.assertAll;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.GoldenCase.Expectation;
@@ -23,6 +24,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
+import org.junit.jupiter.api.io.TempDir;
 
 /** Every file of {@code golden/} is a case; a new case is a new file and no code. */
 class GoldenFilesTest {
@@ -40,6 +42,16 @@ class GoldenFilesTest {
         untried.removeAll(files().stream().map(GoldenCase::read).map(golden -> golden.text("formula"))
                 .collect(Collectors.toSet()));
         assertEquals(new TreeSet<String>(), untried);
+    }
+
+    @Test
+    void anEmptyOrUnsourcedFileFails(@TempDir Path folder) throws IOException {
+        for (String text : List.of("", "{}", "{\"title\": \"x\", \"mark\": \"D\", \"expect\": [{}]}",
+                "{\"title\": \"x\", \"source\": \"a source to be found\", \"mark\": \"D\", \"expect\": []}",
+                "{\"title\": \"x\", \"source\": \"a source to be found\", \"mark\": \"?\", \"expect\": [{}]}")) {
+            GoldenCase golden = GoldenCase.read(Files.writeString(folder.resolve("case.json"), text));
+            assertThrows(AssertionError.class, () -> check(golden), text);
+        }
     }
 
     private static void check(GoldenCase golden) {

@@ -4,7 +4,7 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.util.Map;
 
-/** Numbers with units as golden files write them, such as {@code 9.50 [in_i]}; factors after NIST SP 811, appendix B.8. */
+/** Numbers with units as golden files write them, such as {@code 9.50 [in_i]}; factors of NIST SP 811, appendix B.8. */
 final class GoldenUnits {
     private static final Map<String, String> FACTORS = Map.ofEntries(
             Map.entry("1", "1"), Map.entry("m", "1"), Map.entry("mm", "0.001"), Map.entry("[ft_i]", "0.3048"),

@@ -74,7 +74,8 @@ public final class Sketches {
         double length = 2 + 10 * random.nextDouble();
         double height = 0.2 + 0.6 * random.nextDouble();
         List<Station> stations = IntStream.range(0, count).mapToObj(i -> station(
-                length * (i + random.nextDouble()) / count, 1.2 * height * random.nextDouble(), i == count / 2)).toList();
+                length * (i + random.nextDouble()) / count, 1.2 * height * random.nextDouble(), i == count / 2))
+                .toList();
         return of(stations, length, height, height * random.nextDouble());
     }
 }

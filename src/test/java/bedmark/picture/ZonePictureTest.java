@@ -34,7 +34,8 @@ class ZonePictureTest {
         return Stream.concat(random, Stream.of(Sketches.gravel(), Sketches.nothingKnown(), mirrored(),
                 Sketches.of(List.of(Sketches.station(0, 0, true)), 0.6, 0.5, 0.25),
                 Sketches.of(List.of(Sketches.station(1, 9.0, true)), 3, 0.35, 0.35),
-                Sketches.of(List.of(), 3, 0.35, 0.34), Sketches.of(List.of(Sketches.station(2, 0.1, true)), 4000, 0.3, 0),
+                Sketches.of(List.of(), 3, 0.35, 0.34),
+                Sketches.of(List.of(Sketches.station(2, 0.1, true)), 4000, 0.3, 0),
                 Sketches.without(Sketches.gravel(), Sketches.gravel().boards(), Sketches.FLAT)));
     }
 
@@ -167,7 +168,8 @@ class ZonePictureTest {
         Mark.Dimension clear = picture.drawing().each(Mark.Dimension.class).skip(1).findFirst().orElseThrow();
         double perMetre = (clear.to().x() - clear.from().x()) / 0.78;
         List<Point> belt = picture.drawing().each(Mark.Line.class).filter(line -> line.points().size() == 4)
-                .map(Mark.Line::points).filter(points -> points.get(0).x() > 500 && points.get(1).y() == points.get(2).y())
+                .map(Mark.Line::points)
+                .filter(points -> points.get(0).x() > 500 && points.get(1).y() == points.get(2).y())
                 .findFirst().orElseThrow();
         assertEquals(0.45 * perMetre, belt.get(2).x() - belt.get(1).x(), 1e-9);
         assertEquals((1.2 - 0.45) / 2 * perMetre, belt.get(0).distance(belt.get(1)), 1e-9);
@@ -215,9 +217,10 @@ class ZonePictureTest {
         for (Handle handle : picture.handles()) {
             assertEquals(handle, picture.handleAt(handle.x(), handle.y()).orElseThrow());
         }
-        Handle first = picture(Sketches.gravel()).handles().get(0);
-        assertEquals(first, picture(Sketches.gravel()).handleAt(first.x() - first.radius() + 1, first.y()).orElseThrow());
-        assertTrue(picture(Sketches.gravel()).handleAt(first.x(), first.y() + first.radius() + 1).isEmpty());
+        ZonePicture gravel = picture(Sketches.gravel());
+        Handle first = gravel.handles().get(0);
+        assertEquals(first, gravel.handleAt(first.x() - first.radius() + 1, first.y()).orElseThrow());
+        assertTrue(gravel.handleAt(first.x(), first.y() + first.radius() + 1).isEmpty());
     }
 
     @Test

@@ -1,5 +1,8 @@
 package bedmark.screen;
 
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
 import bedmark.screen.theme.Theme;
@@ -7,6 +10,8 @@ import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.HashSet;
+import java.util.Set;
 import java.util.concurrent.Callable;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.ExecutionException;
@@ -64,7 +69,10 @@ public final class Glass {
         return scene;
     }
 
-    /** Writes a scene into {@code target/pictures}, with so many pixels for each logical one. */
+    /**
+     * Writes a scene into {@code target/pictures}, with so many pixels for each logical one. Fails where the scene
+     * leaves part of the glass bare, or shows next to nothing.
+     */
     public static void picture(String name, Supplier<Parent> root, Light light, Density density, double width,
                                double height, double scale) throws Exception {
         on(() -> {
@@ -81,6 +89,7 @@ public final class Glass {
     }
 
     private static void write(Path file, Scene scene, double scale) throws IOException {
+        scene.getRoot().applyCss();
         scene.getRoot().layout();
         SnapshotParameters parameters = new SnapshotParameters();
         parameters.setTransform(Transform.scale(scale, scale));
@@ -93,12 +102,16 @@ public final class Glass {
         int width = (int) image.getWidth();
         int height = (int) image.getHeight();
         PixelReader pixels = image.getPixelReader();
+        Set<Integer> colours = new HashSet<>();
         BufferedImage copy = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB);
         for (int y = 0; y < height; y++) {
             for (int x = 0; x < width; x++) {
                 copy.setRGB(x, y, pixels.getArgb(x, y));
+                colours.add(pixels.getArgb(x, y) & 0xFFFFFF);
             }
         }
+        assertFalse(colours.contains(0xFF00FF), "part of the glass is bare");
+        assertTrue(colours.size() > 50, "next to nothing is shown");
         Files.createDirectories(file.toAbsolutePath().getParent());
         ImageIO.write(copy, "png", file.toFile());
     }

@@ -41,7 +41,7 @@ public final class Section {
         sine = troughAngle.sine();
         cosine = troughAngle.cosine();
         crownSlope = surchargeAngle.tangent();
-        wingRun = spacing.minus(centreRoll).over(cosine.times(2)).max(Uncertain.ZERO);
+        wingRun = wingRun(spacing, centreRoll, troughAngle);
         troughDepth = wingRun.times(sine);
         carried = troughArea(wingRun).plus(crownArea(spacing));
     }
@@ -69,14 +69,9 @@ public final class Section {
         return new Section(spacing, spacing, Uncertain.ZERO, surchargeAngle);
     }
 
-    /** b1 (m). */
-    public Uncertain spacing() {
-        return spacing;
-    }
-
     /** s, the run of each wing inside the boards (m). */
-    public Uncertain wingRun() {
-        return wingRun;
+    public static Uncertain wingRun(Uncertain spacing, Uncertain centreRoll, Uncertain troughAngle) {
+        return spacing.minus(centreRoll).over(troughAngle.cosine().times(2)).max(Uncertain.ZERO);
     }
 
     /** Depth of the trough under the board line (m). */
@@ -87,11 +82,6 @@ public final class Section {
     /** Rise of the crown between the boards (m). */
     public Uncertain crownRise() {
         return spacing.times(crownSlope).over(4);
-    }
-
-    /** Area that trough and crown carry with no depth at the boards (m²). */
-    public Uncertain carried() {
-        return carried;
     }
 
     /** Area of the bed at a level (m²). */
@@ -105,24 +95,23 @@ public final class Section {
     }
 
     /**
-     * The level after a reading.
+     * The level of a bed by its depth at the belt's centre: less the trough under the board line and the rise of the
+     * crown, where it reaches the boards.
      *
-     * @param raw    the depth at the board, the freeboard or the centre depth (m), not negative
-     * @param method how it was read
-     * @param height of the board over the belt at the board (m)
+     * @param centreDepth D (m), not negative
      */
-    public Uncertain level(Uncertain raw, DepthMethod method, Uncertain height) {
-        return switch (method) {
-            case AT_BOARD, WEAR_LINE -> raw;
-            case FROM_BOARD_TOP -> {
-                Uncertain depth = height.minus(raw);
-                yield depth.value() >= 0 ? depth : level(areaUnderEdge(Uncertain.ZERO.minus(depth)));
-            }
-            case AT_CENTRE -> {
-                Uncertain depth = raw.minus(troughDepth).minus(crownRise());
-                yield depth.value() >= 0 ? depth : level(areaUnderCentre(raw));
-            }
-        };
+    public Uncertain levelOfCentreDepth(Uncertain centreDepth) {
+        Uncertain depth = centreDepth.minus(troughDepth).minus(crownRise());
+        return depth.value() >= 0 ? depth : level(areaUnderCentre(centreDepth));
+    }
+
+    /**
+     * The level of a bed whose edge lies under the board line.
+     *
+     * @param drop how far it lies under it (m), positive
+     */
+    public Uncertain levelUnderBoardLine(Uncertain drop) {
+        return level(areaUnderEdge(drop));
     }
 
     /** Area of a bed that is narrower than the boards, by its depth D at the belt's centre (m²). */

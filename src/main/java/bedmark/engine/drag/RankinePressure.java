@@ -9,7 +9,7 @@ import bedmark.engine.uncertainty.Uncertain;
  *
  * <table><caption>Symbols</caption>
  * <tr><td>μw</td><td>coefficient of friction between material and board; 1 is taken where none is known</td></tr>
- * <tr><td>φ</td><td>angle of internal friction (rad), 0 to under π/2; that of repose is taken where none is known</td></tr>
+ * <tr><td>φ</td><td>angle of internal friction (rad), 0 to under π/2; the angle of repose where none is known</td></tr>
  * <tr><td>ρ</td><td>bulk density (kg/m³)</td></tr>
  * <tr><td>g</td><td>9.806 65 m/s², standard gravity [S11]</td></tr>
  * <tr><td>∫h² dx</td><td>square of the depth at the board, over the length of one side (m³)</td></tr>

@@ -11,7 +11,7 @@ import bedmark.engine.uncertainty.ImpossibleReading;
  */
 public record Certainty(double overloaded, double undecided, double near) {
 
-    /** @throws ImpossibleReading {@code certainty-impossible} unless 0 &lt; undecided &lt;= overloaded &lt;= 1 and so on */
+    /** @throws ImpossibleReading {@code certainty-impossible} where one is 0, over 1, or undecided over overloaded */
     public Certainty {
         if (!(undecided > 0 && undecided <= overloaded && overloaded <= 1 && near > 0 && near <= 1)) {
             throw new ImpossibleReading("certainty-impossible", "/plant/limits/certainty",

@@ -36,7 +36,7 @@ public enum Rule {
     /** Change of depth over the last quarter of the zone, over the mean depth. */
     BED_NOT_SETTLED("bed-not-settled", Sense.OVER, "1", warning(0.15, "A"), "centre-loading"),
     /** Number of seal segments that are not sound. */
-    SEAL_DEFECT("seal-defect", Sense.OVER, "1", warning(0, "A"), "mend-seal");
+    SEAL_DEFECT("seal-defect", Sense.OVER, "1", warning(0, "C"), "mend-seal");
 
     private final String code;
     private final Sense sense;

@@ -16,7 +16,7 @@ public final class CautionStrip extends HBox {
         setAlignment(Pos.CENTER_LEFT);
         Region bar = new Region();
         bar.getStyleClass().add("bar");
-        text = Labels.wrapped("text", caution);
+        text = Labels.wrapped("words", caution);
         HBox.setHgrow(text, Priority.ALWAYS);
         getChildren().addAll(bar, text);
     }

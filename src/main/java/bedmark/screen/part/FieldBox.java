@@ -12,6 +12,7 @@ import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
 
 /**
  * The box of a number: value and unit at the left, at the right the ghost of the last survey, which is never a value.
@@ -23,6 +24,7 @@ public final class FieldBox extends HBox {
     static final PseudoClass QUESTIONED = PseudoClass.getPseudoClass("questioned");
     static final PseudoClass WRONG = PseudoClass.getPseudoClass("wrong");
 
+    private final Label name = Labels.label("box-name");
     private final Label value = Labels.label("value");
     private final Label unit = Labels.label("unit");
     private final Label ghost = Labels.label("ghost");
@@ -45,10 +47,14 @@ public final class FieldBox extends HBox {
         HBox row = new HBox(value, unit, between, ghost);
         row.getStyleClass().add("row");
         row.setAlignment(Pos.BASELINE_LEFT);
-        HBox.setHgrow(row, Priority.ALWAYS);
+        VBox lines = new VBox(this.name, row);
+        lines.setAlignment(Pos.CENTER_LEFT);
+        HBox.setHgrow(lines, Priority.ALWAYS);
+        lines.setMinWidth(0);
+        this.name.managedProperty().bind(this.name.textProperty().isNotEmpty());
         setAlignment(Pos.CENTER);
         setFillHeight(false);
-        getChildren().add(row);
+        getChildren().add(lines);
         setMaxWidth(Double.MAX_VALUE);
         value.setMinWidth(Region.USE_PREF_SIZE);
         value.managedProperty().bind(value.textProperty().isNotEmpty());
@@ -68,6 +74,11 @@ public final class FieldBox extends HBox {
                 chosen.run();
             }
         });
+    }
+
+    /** The name inside the box, over the value; empty where it stands beside or above the box. */
+    public StringProperty nameProperty() {
+        return name.textProperty();
     }
 
     /** What was typed, as typed; empty while the field is. */

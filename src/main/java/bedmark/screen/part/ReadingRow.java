@@ -9,7 +9,7 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
-/** One reading of a form: what it is, its box, what stands beside the box, and below it the message of its judgement. */
+/** One reading of a form: what it is, its box, what stands beside the box, below them the message of its judgement. */
 public final class ReadingRow extends VBox {
     private final Label message = Labels.wrapped("message", "");
     private final FieldBox box;

@@ -84,8 +84,18 @@ public final class StartView implements Screen {
         Label name = new Label(wording.text("screen.start.person"));
         name.setLabelFor(person);
         questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()),
-                choice("screen.start.units", units()), choice("screen.start.language", languages()),
-                choice("screen.start.light", lights()), choice("screen.start.hand", hands()));
+                pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
+                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())));
+    }
+
+    private static HBox pair(VBox left, VBox right) {
+        HBox pair = new HBox(left, right);
+        pair.getStyleClass().add("pair");
+        for (VBox box : List.of(left, right)) {
+            box.setPrefWidth(100);
+            HBox.setHgrow(box, Priority.ALWAYS);
+        }
+        return pair;
     }
 
     private void offerDemo() {

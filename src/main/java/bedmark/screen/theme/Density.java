@@ -17,7 +17,7 @@ public record Density(double dpi, Hand hand) {
 
     private static final double MM_PER_INCH = 25.4;
     private static final Pattern LENGTH = Pattern.compile("\\b(\\d+(?:\\.\\d+)?)mm\\b");
-    private static final Pattern TARGET = Pattern.compile("\\b(target|secondary)-height\\b");
+    private static final Pattern TARGET = Pattern.compile("\\b(target|secondary|foot)-height\\b");
 
     public Density {
         if (!(dpi > 0)) {
@@ -61,12 +61,19 @@ public record Density(double dpi, Hand hand) {
         return mm(hand.secondary());
     }
 
-    /** A style sheet with all millimetres and target heights written out as pixels of this density. */
+    /**
+     * A style sheet written out in pixels of this density: targets never less than asked for, all other millimetres
+     * rounded, so that type and gaps stay as close as whole pixels allow.
+     */
     String transcribe(String sheet) {
         String targets = TARGET.matcher(sheet).replaceAll(match -> Matcher.quoteReplacement(
-                pixels(match.group(1).equals("target") ? target() : secondary())));
+                pixels(switch (match.group(1)) {
+                    case "target" -> target();
+                    case "secondary" -> secondary();
+                    default -> mm(Hand.BARE.target());
+                })));
         return LENGTH.matcher(targets).replaceAll(match ->
-                Matcher.quoteReplacement(pixels(mm(Double.parseDouble(match.group(1))))));
+                Matcher.quoteReplacement(pixels(Math.rint(Double.parseDouble(match.group(1)) * perMm()))));
     }
 
     private static String pixels(double pixels) {

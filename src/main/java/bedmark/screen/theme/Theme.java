@@ -3,51 +3,53 @@ package bedmark.screen.theme;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
-import java.net.URL;
 import java.nio.charset.StandardCharsets;
 import java.util.Base64;
 import java.util.List;
+import java.util.Locale;
 import java.util.Objects;
-import javafx.css.PseudoClass;
+import java.util.stream.Stream;
 import javafx.scene.Scene;
 
 /** Dresses a scene: typeface, colours of the light, sizes of the density. */
 public final class Theme {
-    private static final PseudoClass NIGHT = PseudoClass.getPseudoClass("night");
-    private static final PseudoClass GLOVED = PseudoClass.getPseudoClass("gloved");
-    private static final String STYLE_CLASS = "bedmark";
+    /** The sheets that hold the look, in their order; lengths in them are those of the glass. */
+    static final List<String> SHEETS = List.of("theme.css", "parts.css", "controls.css", "screens.css");
 
     private Theme() {
     }
 
     /**
-     * Dresses a scene, or dresses it anew. Its style sheets are replaced.
+     * Dresses a scene, or dresses it anew; its style sheets are replaced. Pop-ups that it opens take them over, so the
+     * light and the sizes are written into the sheets and do not hang on the scene's own root.
      */
     public static void apply(Scene scene, Light light, Density density) {
         Typeface.load();
-        if (!scene.getRoot().getStyleClass().contains(STYLE_CLASS)) {
-            scene.getRoot().getStyleClass().add(STYLE_CLASS);
-        }
-        scene.getRoot().pseudoClassStateChanged(NIGHT, light == Light.NIGHT);
-        scene.getRoot().pseudoClassStateChanged(GLOVED, density.hand() == Hand.GLOVED);
-        List<String> sheets = List.of(resource("tokens.css").toExternalForm(), sheet("theme.css", density),
-                sheet("screens.css", density));
+        List<String> sheets = Stream.concat(Stream.of(tokens(light)), SHEETS.stream()
+                .map(name -> density.transcribe(read(name)))).map(Theme::asAddress).toList();
         if (!scene.getStylesheets().equals(sheets)) {
             scene.getStylesheets().setAll(sheets);
         }
     }
 
-    private static String sheet(String name, Density density) {
-        try (InputStream in = resource(name).openStream()) {
-            String text = density.transcribe(new String(in.readAllBytes(), StandardCharsets.UTF_8));
-            return "data:text/css;charset=UTF-8;base64,"
-                    + Base64.getEncoder().encodeToString(text.getBytes(StandardCharsets.UTF_8));
+    /** The tokens of a light, as the style of the root. */
+    private static String tokens(Light light) {
+        String tokens = read("tokens.css");
+        int start = tokens.indexOf("." + light.name().toLowerCase(Locale.ROOT) + " {");
+        int open = tokens.indexOf('{', start);
+        return ".root " + tokens.substring(open, tokens.indexOf('}', open) + 1);
+    }
+
+    private static String asAddress(String sheet) {
+        return "data:text/css;charset=UTF-8;base64,"
+                + Base64.getEncoder().encodeToString(sheet.getBytes(StandardCharsets.UTF_8));
+    }
+
+    static String read(String name) {
+        try (InputStream in = Objects.requireNonNull(Theme.class.getResourceAsStream(name))) {
+            return new String(in.readAllBytes(), StandardCharsets.UTF_8);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
-    }
-
-    private static URL resource(String name) {
-        return Objects.requireNonNull(Theme.class.getResource(name));
     }
 }

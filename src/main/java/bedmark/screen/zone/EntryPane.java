@@ -3,6 +3,7 @@ package bedmark.screen.zone;
 import bedmark.document.Node;
 import bedmark.form.Choice;
 import bedmark.form.Texts;
+import bedmark.quantity.BeltState;
 import bedmark.quantity.Unit;
 import bedmark.screen.Listening;
 import bedmark.screen.pad.NumericPad;
@@ -12,6 +13,7 @@ import bedmark.screen.pad.PadModel;
 import bedmark.screen.pad.PadSetup;
 import bedmark.screen.pad.PadWords;
 import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
@@ -74,6 +76,25 @@ final class EntryPane extends StackPane {
             getChildren().setAll(slot instanceof Slot.TextSlot text && !SlotWords.isMaterial(slot)
                     ? textPane(text) : choicePane(slot));
         }
+    }
+
+    /** Asks what the belt does, in place of the pad. */
+    void askBeltState() {
+        VBox pane = new VBox(new SectionHeader(wording.text("screen.belt.ask")));
+        pane.getStyleClass().add("choice-pane");
+        for (BeltState state : BeltState.values()) {
+            boolean said = model.beltStateProperty().get().equals(Optional.of(state));
+            ActionButton button = new ActionButton(said ? Weight.PRIMARY : Weight.PLAIN,
+                    wording.text("screen.belt." + state.code()), () -> {
+                        model.sayBeltState(state);
+                        show(model.activeProperty().get());
+                    });
+            button.setId("belt-" + state.code());
+            button.setMaxWidth(Double.MAX_VALUE);
+            pane.getChildren().add(button);
+        }
+        pad.close();
+        getChildren().setAll(pane);
     }
 
     private PadSetup setup(Slot slot) {

@@ -40,7 +40,8 @@ final class Pull {
         }
         Snap.Stepped position = snap.position(picture.scale().position(x), picture.scale().length());
         OptionalInt there = IntStream.range(0, sketch.stations().size()).filter(index ->
-                Math.abs(sketch.stations().get(index).position() - position.metres()) < position.step() / 2).findFirst();
+                Math.abs(sketch.stations().get(index).position() - position.metres()) < position.step() / 2)
+                .findFirst();
         Grip grip = there.isPresent() ? new Grip.OfStation(there.getAsInt()) : new Grip.AtPlace(position);
         return Optional.of(new Pull(grip, picture.scale(), snap, x, y, 0));
     }

@@ -40,19 +40,12 @@ final class RowView extends VBox {
         this.wording = wording;
         this.words = new SlotWords(wording, model.setting().register());
         getStyleClass().add("reading-row");
-        Label name = new Label(name());
-        name.getStyleClass().add("name");
         message.getStyleClass().add("message");
         message.setWrapText(true);
         message.managedProperty().bind(message.visibleProperty());
         message.visibleProperty().bind(message.textProperty().isNotEmpty());
         message.setMinHeight(USE_PREF_SIZE);
-        HBox head = new HBox(name);
-        head.getStyleClass().add("row");
-        HBox.setHgrow(name, Priority.ALWAYS);
-        name.setMaxWidth(Double.MAX_VALUE);
-        name.setWrapText(true);
-        getChildren().addAll(head, cells(), message);
+        getChildren().addAll(cells(), message);
         row.growing().filter(place -> model.open()).ifPresent(place -> getChildren().add(lineButtons(place)));
         update();
     }
@@ -62,10 +55,8 @@ final class RowView extends VBox {
     }
 
     private String name() {
-        if (row.line().isPresent()) {
-            return wording.text("screen.zone.line." + row.field().key(), row.line().get());
-        }
-        return words.label(row.slots().get(0));
+        String field = row.field().head().label().in(wording.words().language());
+        return row.line().map(line -> wording.text("screen.zone.line", line, field)).orElse(field);
     }
 
     private javafx.scene.Node cells() {
@@ -97,6 +88,8 @@ final class RowView extends VBox {
 
     private FieldBox box(Slot slot) {
         FieldBox box = new FieldBox(name() + ", " + words.label(slot), () -> model.activate(slot));
+        box.nameProperty().set(row.line().isPresent() && slot == row.slots().get(0)
+                ? wording.text("screen.zone.line", row.line().get(), words.label(slot)) : words.label(slot));
         box.setId("slot" + slot.where().toString().replace('/', '-'));
         if (!(slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot)) {
             box.getStyleClass().add("words");
@@ -158,9 +151,6 @@ final class RowView extends VBox {
             SlotWords.Shown shown = words.shown(slot, answer);
             box.valueProperty().set(shown.value());
             box.unitProperty().set(shown.unit().isEmpty() && unit != null ? wording.symbol(unit) : shown.unit());
-            if (shown.value().isEmpty() && box.getStyleClass().contains("words")) {
-                box.unitProperty().set(row.slots().size() > 1 ? words.label(slot) : "");
-            }
         }
         box.freshProperty().set(active && typed.isEmpty() && !box.valueProperty().get().isEmpty());
         box.ghostProperty().set(row.slots().size() == 1 || slot.where().last().equals("depth")

@@ -40,7 +40,6 @@ import java.util.List;
 import java.util.Optional;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
-import javafx.scene.control.ToggleButton;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -77,7 +76,7 @@ public final class ZoneView implements Screen {
         this.entry = new EntryPane(model, wording, listening);
         this.picture = new ZonePictureView(sketch(model.surveyProperty().get()), density, new BedPull());
         this.verdict = new VerdictBlock(Optional.of(judgedButton()));
-        this.head = Heads.head(workplace, listening, tag(), title());
+        this.head = Heads.head(workplace, listening, tag(), title(), beltButton());
         this.foot = footBar();
         compose();
         listening.onChange(model.surveyProperty(), survey -> refresh());
@@ -88,7 +87,8 @@ public final class ZoneView implements Screen {
 
     private void compose() {
         work.getStyleClass().add("work");
-        work.getChildren().addAll(form, model.open() ? beltState() : completedNote(), entry);
+        work.getChildren().add(form);
+        work.getChildren().add(model.open() ? entry : completedNote());
         VBox.setVgrow(form, Priority.ALWAYS);
         result.getStyleClass().add("result");
         result.getChildren().addAll(picture, verdict);
@@ -113,22 +113,17 @@ public final class ZoneView implements Screen {
     }
 
     /** What the belt does now: it decides how far a depth can be trusted, and which caution stands here. */
-    private HBox beltState() {
-        HBox bar = new HBox();
-        bar.getStyleClass().add("belt-state");
-        for (BeltState state : BeltState.values()) {
-            ToggleButton button = new ToggleButton(wording.text("screen.belt." + state.code()));
-            button.setId("belt-" + state.code());
-            button.getStyleClass().add("secondary-target");
-            button.setWrapText(true);
-            button.setMaxWidth(Double.MAX_VALUE);
-            button.setPrefWidth(100);
-            HBox.setHgrow(button, Priority.ALWAYS);
-            button.setOnAction(event -> model.sayBeltState(state));
-            listening.to(model.beltStateProperty(), now -> button.setSelected(now.equals(Optional.of(state))));
-            bar.getChildren().add(button);
-        }
-        return bar;
+    private ActionButton beltButton() {
+        ActionButton button = new ActionButton(Weight.PLAIN, "", entry::askBeltState);
+        button.setId("belt-state");
+        button.getStyleClass().add("secondary-target");
+        button.setDisable(!model.open());
+        listening.to(model.beltStateProperty(), state -> {
+            String words = wording.text("screen.belt." + state.map(BeltState::code).orElse("unsaid"));
+            button.setText(words);
+            button.setAccessibleText(words);
+        });
+        return button;
     }
 
     private VBox completedNote() {

@@ -1,5 +1,8 @@
 package bedmark.screen.part;
 
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
 import bedmark.picture.Sketches;
 import bedmark.picture.Snap;
 import bedmark.quantity.Quality;
@@ -18,16 +21,21 @@ import bedmark.screen.theme.Light;
 import bedmark.screen.zone.Grip;
 import bedmark.screen.zone.PullListener;
 import bedmark.screen.zone.ZonePictureView;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import javafx.geometry.Bounds;
 import javafx.geometry.Insets;
+import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.Parent;
+import javafx.scene.Scene;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
+import javafx.scene.control.Labeled;
 import javafx.scene.control.ListView;
 import javafx.scene.control.ProgressBar;
 import javafx.scene.control.TextField;
@@ -37,6 +45,7 @@ import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
+import javafx.scene.text.Text;
 import org.junit.jupiter.api.Test;
 
 /** Draws the parts, and a transfer point composed of them, for looking at. */
@@ -102,14 +111,14 @@ class PartPicturesTest {
                 : new VBox(Samples.depth("4.0 m", "262", "was 142", Quality.ESTIMATED, true),
                         new CautionStrip("Belt running: sight only, from outside the guards"), pad);
         VBox.setVgrow(pad, Priority.ALWAYS);
-        form.setSpacing(hand == Hand.BARE ? 8 : 4);
-        form.setPadding(new Insets(8, 16, 8, 16));
+        form.setSpacing(hand == Hand.BARE ? 7 : 4);
+        form.setPadding(hand == Hand.BARE ? new Insets(8, 16, 8, 16) : new Insets(5, 16, 5, 16));
         form.setPrefWidth(471);
         form.setStyle("-fx-border-color: transparent -bm-line transparent transparent; -fx-border-width: 0 1px 0 0;");
         VBox result = result(380);
         result.setPadding(new Insets(12, 20, 10, 20));
         BorderPane pane = new BorderPane(result, top(), null, foot(), form);
-        BorderPane.setAlignment(form, javafx.geometry.Pos.TOP_LEFT);
+        BorderPane.setAlignment(form, Pos.TOP_LEFT);
         return pane;
     }
 
@@ -199,5 +208,44 @@ class PartPicturesTest {
                 new Density(Density.DEFAULT_DPI, Hand.GLOVED), 1280, 800, 1);
         Glass.picture("landscape-day-double", () -> landscape(Hand.BARE), Light.DAY,
                 Density.of(299, 2, Hand.BARE), 1280, 800, 2);
+    }
+
+    private static List<Labeled> labels(Parent parent) {
+        List<Labeled> labels = new ArrayList<>();
+        for (Node child : parent.getChildrenUnmodifiable()) {
+            if (child instanceof Labeled labeled && !labeled.getText().isEmpty() && labeled.isVisible()
+                    && labeled.getContentDisplay() != ContentDisplay.GRAPHIC_ONLY) {
+                labels.add(labeled);
+            }
+            if (child instanceof Parent inner) {
+                labels.addAll(labels(inner));
+            }
+        }
+        return labels;
+    }
+
+    private static void assertWhole(Parent root, Density density, double width, double height) {
+        Scene scene = Glass.show(root, Light.DAY, density, width, height);
+        for (Labeled label : labels(root)) {
+            Text shown = (Text) label.lookup(".text");
+            assertEquals(label.getText().replace(" ", ""), shown.getText().replaceAll("[ \n]", ""));
+            Bounds place = label.localToScene(label.getLayoutBounds());
+            assertTrue(place.getMinX() >= 0 && place.getMinY() >= 0 && place.getMaxX() <= width
+                    && place.getMaxY() <= height, () -> label.getText() + " at " + place);
+        }
+        scene.getWindow().hide();
+    }
+
+    @Test
+    void noTextIsCutAndNothingLeavesTheGlass() throws Exception {
+        Glass.on(() -> {
+            assertWhole(landscape(Hand.BARE), Density.standard(), 1280, 800);
+            assertWhole(landscape(Hand.GLOVED), new Density(Density.DEFAULT_DPI, Hand.GLOVED), 1280, 800);
+            assertWhole(portrait(), Density.standard(), 800, 1280);
+            for (double[] glass : new double[][] {{149, 1}, {224, 1.5}, {299, 2}}) {
+                assertWhole(landscape(Hand.BARE), Density.of(glass[0], glass[1], Hand.BARE), 1280, 800);
+            }
+            return "";
+        });
     }
 }

@@ -1,6 +1,8 @@
 package bedmark.screen.zone;
 
 import bedmark.picture.FeedEnd;
+import bedmark.picture.SealShape;
+import bedmark.picture.SealState;
 import bedmark.picture.Sketches;
 import bedmark.picture.Snap;
 import bedmark.picture.ZoneSketch;
@@ -8,6 +10,7 @@ import bedmark.screen.Glass;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -48,10 +51,31 @@ class ZonePicturesTest {
         return zones;
     }
 
+    private static ZoneSketch sealed(SealShape shape, SealState state) {
+        ZoneSketch gravel = Sketches.gravel();
+        return new ZoneSketch(gravel.boards(), gravel.belt(), gravel.stations(), gravel.limit(), new ZoneSketch.Seals(
+                List.of(new ZoneSketch.SealSpan(shape, SealState.SOUND, 6.4)),
+                List.of(new ZoneSketch.SealSpan(shape, state, 6.4))), FeedEnd.LEFT, gravel.captions());
+    }
+
+    @Test
+    void picturesOfTheSeals() throws Exception {
+        Glass.picture("seals-day", () -> {
+            GridPane grid = new GridPane();
+            for (int i = 0; i < SealShape.values().length; i++) {
+                ZonePictureView view = new ZonePictureView(
+                        sealed(SealShape.values()[i], SealState.values()[i]), Density.standard(), NOBODY);
+                view.setPrefSize(770, 395);
+                grid.add(view, i % 2, i / 2);
+            }
+            return grid;
+        }, Light.DAY, Density.standard(), 1540, 1190, 1);
+    }
+
     @Test
     void picturesOfManyZones() throws Exception {
         for (Light light : Light.values()) {
-            Glass.picture("zones-" + light.name().toLowerCase(), () -> {
+            Glass.picture("zones-" + light.name().toLowerCase(Locale.ROOT), () -> {
                 GridPane grid = new GridPane();
                 grid.setHgap(20);
                 grid.setVgap(20);

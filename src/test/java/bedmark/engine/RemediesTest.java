@@ -1,0 +1,172 @@
+package bedmark.engine;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.engine.bed.DepthMethod;
+import bedmark.engine.seal.SealCondition;
+import bedmark.engine.seal.SealType;
+import bedmark.engine.seal.Side;
+import bedmark.engine.verdict.Limit;
+import bedmark.engine.verdict.Remedy;
+import bedmark.engine.verdict.Rule;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.junit.jupiter.api.Test;
+
+class RemediesTest {
+    private static final LoadingZone ZONE = Zones.healthy();
+    private static final LoadingZone DEEP = ZONE.withStations(List.of()).without(Datum.THROUGHPUT)
+            .withStation(1, 0.36, DepthMethod.AT_BOARD, 0).withStation(5, 0.30, DepthMethod.AT_BOARD, 0);
+
+    @Test
+    void aBedThatLagsIsFreedFirst() {
+        LoadingZone lagging = DEEP.with(Datum.THROUGHPUT, 250, 0);
+        List<Remedy> remedies = remedies(lagging);
+        assertEquals("free-bed", remedies.get(0).code());
+        assertTrue(remedies.get(0).skirtPower() < power(lagging));
+        assertTrue(find(DEEP, "free-bed").isEmpty(), "no scale, no ratio");
+    }
+
+    @Test
+    void aLowerFeedEndsTheWarningAndIsComparedByTheTonne() {
+        Remedy remedy = find(DEEP, "lower-feed").orElseThrow();
+        double factor = remedy.change().orElseThrow();
+        assertTrue(factor > 0 && factor < 1);
+        double before = energy(DEEP);
+        double after = remedy.drivePower().orElseThrow() / 0.92 * 5000 / factor;
+        assertEquals(before - after, remedy.savedWh().orElseThrow(), 1e-6 * before);
+        double section = carried() / 0.7;
+        LoadingZone lowered = ZONE.withStations(List.of())
+                .withStation(1, factor * 0.36 + (factor - 1) * section, DepthMethod.AT_BOARD, 0)
+                .withStation(5, factor * 0.30 + (factor - 1) * section, DepthMethod.AT_BOARD, 0);
+        assertEquals(1.10, observed(lowered, Rule.BED_OVER_DESIGN), 1e-9);
+        assertEquals(remedy.skirtPower(), power(lowered), 1e-9 * power(lowered));
+    }
+
+    @Test
+    void aFloodedBeltIsFedLess() {
+        LoadingZone flooded = ZONE.with(Datum.THROUGHPUT, 600, 0);
+        Remedy remedy = find(flooded, "lower-feed").orElseThrow();
+        assertEquals(0.85, remedy.change().orElseThrow() * observed(flooded, Rule.FLOW_OVER_CAPACITY), 1e-9);
+    }
+
+    @Test
+    void aFasterBeltIsShownButNotRanked() {
+        Remedy remedy = find(DEEP, "faster-belt").orElseThrow();
+        assertFalse(remedy.ranked());
+        assertEquals(OptionalDouble.empty(), remedy.savedWh());
+        assertEquals(2 / find(DEEP, "lower-feed").orElseThrow().change().orElseThrow(),
+                remedy.change().orElseThrow(), 1e-12);
+        assertEquals(Optional.of(Rule.ZONE_TOO_SHORT), find(DEEP.with(Datum.BELT_SPEED, 3.0, 0), "faster-belt")
+                .orElseThrow().refusedBecause());
+    }
+
+    @Test
+    void boardsGoAsWideAsTheBeltBears() {
+        Remedy remedy = find(ZONE, "widen-boards").orElseThrow();
+        assertEquals(0.8, remedy.change().orElseThrow(), 1e-12);
+        assertEquals(Optional.empty(), remedy.refusedBecause());
+        assertTrue(remedy.meanDepth() < 0.12);
+        assertTrue(remedy.savedWh().orElseThrow() > 0);
+    }
+
+    @Test
+    void boardsThatWouldHaveToStandTooWideAreRefusedByName() {
+        LoadingZone wide = DEEP.with(Datum.READ_SPACING, 0.795, 0).with(Datum.DESIGN_BED_DEPTH, 0.27, 0);
+        Remedy remedy = find(wide, "widen-boards").orElseThrow();
+        assertEquals(Optional.of(Rule.BOARDS_TOO_WIDE), remedy.refusedBecause());
+        assertTrue(remedy.change().orElseThrow() > 0.8);
+        List<Remedy> all = remedies(wide);
+        assertEquals(remedy, all.get(all.size() - 1), "refused ones come last");
+        LoadingZone hopeless = DEEP.with(Datum.READ_SPACING, 0.799, 0).with(Datum.DESIGN_BED_DEPTH, 0.02, 0);
+        assertTrue(find(hopeless, "widen-boards").isEmpty(),
+                "not even the whole belt would do");
+        assertTrue(find(ZONE.with(Datum.READ_SPACING, 0.8, 0), "widen-boards").isEmpty(), "nothing calls for it");
+    }
+
+    @Test
+    void aLongZoneIsCutToWhatItNeeds() {
+        Remedy remedy = find(ZONE, "shorten-zone").orElseThrow();
+        assertEquals(1.5 + 1.2 * 2, remedy.change().orElseThrow(), 1e-12);
+        assertEquals(power(ZONE) * 3.9 / 6, remedy.skirtPower(), 1e-9 * power(ZONE));
+        assertTrue(find(ZONE.with(Datum.IMPACT_LENGTH, 3.6, 0), "shorten-zone").isEmpty());
+    }
+
+    @Test
+    void sealsAreWorthMendingOnlyWhereTheSiteKnowsThatTheyDragMore() {
+        LoadingZone tight = ZONE.withSeals(List.of())
+                .withSeal(Side.LEFT, SealType.VERTICAL, SealCondition.OVER_TIGHTENED, 6, 0)
+                .withSeal(Side.RIGHT, SealType.VERTICAL, SealCondition.WORN, 6, 0);
+        assertTrue(find(tight, "adjust-seal").isEmpty());
+        assertTrue(find(tight, "renew-seal").isEmpty());
+        Settings site = Settings.standard().with(Settings.standard().sealRates()
+                .with(SealType.VERTICAL, SealCondition.OVER_TIGHTENED, 3)
+                .with(SealType.VERTICAL, SealCondition.WORN, 1.2));
+        List<Remedy> remedies = Engine.assess(tight, site).remedies();
+        assertTrue(remedies.stream().anyMatch(remedy -> remedy.code().equals("adjust-seal")));
+        assertTrue(remedies.stream().anyMatch(remedy -> remedy.code().equals("renew-seal")));
+    }
+
+    @Test
+    void nothingIsOfferedThatTheReadingsDoNotSupport() {
+        assertEquals(List.of(), remedies(LoadingZone.UNKNOWN));
+        assertEquals(List.of(), remedies(DEEP.without(Datum.BELT_SPEED)));
+        assertTrue(find(DEEP.without(Datum.BELT_WIDTH), "widen-boards").isEmpty());
+        Remedy unlabelled = find(DEEP.without(Datum.LOADED_HOURS).without(Datum.DRIVE_EFFICIENCY), "lower-feed")
+                .orElseThrow();
+        assertEquals(OptionalDouble.empty(), unlabelled.savedWh());
+        assertEquals(OptionalDouble.empty(), unlabelled.drivePower());
+        assertEquals(OptionalDouble.empty(), unlabelled.driveShare());
+    }
+
+    @Test
+    void theGreatestSavingComesFirst() {
+        double before = Double.POSITIVE_INFINITY;
+        for (Remedy remedy : remedies(DEEP)) {
+            if (remedy.ranked() && remedy.refusedBecause().isEmpty()) {
+                assertTrue(remedy.savedWh().orElseThrow() <= before);
+                before = remedy.savedWh().orElseThrow();
+            }
+        }
+        assertTrue(before < Double.POSITIVE_INFINITY);
+    }
+
+    @Test
+    void aRuleWithoutAnyLimitAsksForNoRemedy() {
+        Settings silent = Settings.standard().with(Settings.standard().limits()
+                .with(Rule.BED_OVER_DESIGN, Limit.ofSite(OptionalDouble.empty(), OptionalDouble.empty()))
+                .with(Rule.BED_OVER_BOARD, Limit.ofSite(OptionalDouble.empty(), OptionalDouble.of(0.8))));
+        Remedy remedy = Engine.assess(DEEP, silent).remedies().stream()
+                .filter(offered -> offered.code().equals("lower-feed")).findFirst().orElseThrow();
+        assertEquals((carried() + 0.7 * 0.8 * 0.4) / (carried() + 0.7 * 0.36), remedy.change().orElseThrow(), 1e-12);
+    }
+
+    private static double carried() {
+        double wing = (0.7 - 0.45) / 2 / Math.cos(Math.toRadians(35));
+        return (0.45 + 0.125) * wing * Math.sin(Math.toRadians(35)) + 0.49 * Math.tan(Math.toRadians(20)) / 6;
+    }
+
+    private static List<Remedy> remedies(LoadingZone zone) {
+        return Engine.assess(zone, Settings.standard()).remedies();
+    }
+
+    private static Optional<Remedy> find(LoadingZone zone, String code) {
+        return remedies(zone).stream().filter(remedy -> remedy.code().equals(code)).findFirst();
+    }
+
+    private static double power(LoadingZone zone) {
+        return Engine.assess(zone, Settings.standard()).get(Result.SKIRT_POWER).orElseThrow().value();
+    }
+
+    private static double energy(LoadingZone zone) {
+        return Engine.assess(zone, Settings.standard()).get(Result.ENERGY).orElseThrow().value();
+    }
+
+    private static double observed(LoadingZone zone, Rule rule) {
+        return Engine.assess(zone, Settings.standard()).findings().stream()
+                .filter(finding -> finding.rule() == rule).findFirst().orElseThrow().observed();
+    }
+}

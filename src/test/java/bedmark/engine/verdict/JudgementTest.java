@@ -1,0 +1,91 @@
+package bedmark.engine.verdict;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.engine.uncertainty.Estimate;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.junit.jupiter.api.Test;
+
+class JudgementTest {
+    private static final Limit LIMIT = Rule.BED_OVER_BOARD.limit();
+    private static final double NINETY = 1.2815515655446004;
+
+    @Test
+    void overloadTakesNinetyPercent() {
+        assertEquals(Level.OVERLOADED, level(1 + 0.1 * NINETY * 1.001, 0.1));
+        assertEquals(Level.UNDECIDED, level(1 + 0.1 * NINETY * 0.999, 0.1));
+        assertEquals(Level.UNDECIDED, level(1 - 0.1 * NINETY * 0.999, 0.1));
+        assertEquals(Level.NEAR, level(1 - 0.1 * NINETY * 1.001, 0.1));
+    }
+
+    @Test
+    void nearTakesFiftyPercent() {
+        assertEquals(Level.NEAR, level(0.85, 0.01));
+        assertEquals(Level.WITHIN, level(0.8499, 0.01));
+    }
+
+    @Test
+    void aCertainValueOnALimitKeepsIt() {
+        assertEquals(Level.WITHIN, level(0.85, 0));
+        assertEquals(Level.NEAR, level(1.00, 0));
+        assertEquals(Level.OVERLOADED, level(Math.nextUp(1.0), 0));
+    }
+
+    @Test
+    void aRuleMayBeBrokenFromBelow() {
+        Finding finding = Judgement.of(Rule.ZONE_TOO_SHORT, new Estimate(0.9, 0.05), Rule.ZONE_TOO_SHORT.limit(),
+                Certainty.standard(), Optional.empty());
+        assertEquals(Level.NEAR, finding.level());
+        assertEquals(0.9772498680518208, finding.probabilityNear().orElseThrow(), 1e-12);
+        assertEquals(OptionalDouble.empty(), finding.probabilityOverloaded());
+    }
+
+    @Test
+    void theSiteMaySetHowSureAVerdictMustBe() {
+        Finding finding = Judgement.of(Rule.BED_OVER_BOARD, new Estimate(1.05, 0.1), LIMIT,
+                new Certainty(0.6, 0.4, 0.5), Optional.of("/readings/x"));
+        assertEquals(Level.OVERLOADED, finding.level());
+        assertEquals(Optional.of("/readings/x"), finding.leadingReading());
+    }
+
+    @Test
+    void aRuleWithoutLimitsIsKept() {
+        Limit none = Limit.ofSite(OptionalDouble.empty(), OptionalDouble.empty());
+        assertEquals(Level.WITHIN, Judgement.of(Rule.BED_OVER_BOARD, new Estimate(9, 1), none, Certainty.standard(),
+                Optional.empty()).level());
+        assertFalse(Judgement.isBroken(Rule.BED_OVER_BOARD, 9, none));
+    }
+
+    @Test
+    void brokenIsBeyondEitherLimit() {
+        assertFalse(Judgement.isBroken(Rule.BED_OVER_BOARD, 0.85, LIMIT));
+        assertTrue(Judgement.isBroken(Rule.BED_OVER_BOARD, 0.86, LIMIT));
+        assertTrue(Judgement.isBroken(Rule.BED_OVER_BOARD, 1.1,
+                Limit.ofSite(OptionalDouble.empty(), OptionalDouble.of(1))));
+    }
+
+    @Test
+    void levelsAreOrderedFromBestToWorst() {
+        assertEquals(Level.OVERLOADED, Level.UNDECIDED.or(Level.OVERLOADED));
+        assertEquals(Level.UNDECIDED, Level.UNDECIDED.or(Level.INCOMPLETE));
+        assertEquals(Level.INCOMPLETE, Level.NEAR.or(Level.INCOMPLETE));
+        assertEquals(Level.NEAR, Level.NEAR.or(Level.WITHIN));
+    }
+
+    @Test
+    void aFindingSpeaksItsRule() {
+        Finding finding = Judgement.of(Rule.BELT_TOO_FAST, new Estimate(1, 0), Rule.BELT_TOO_FAST.limit(),
+                Certainty.standard(), Optional.empty());
+        assertEquals("belt-too-fast", finding.code());
+        assertEquals("m/s", finding.unit());
+        assertEquals("slow-belt", finding.action());
+    }
+
+    private static Level level(double observed, double uncertainty) {
+        return Judgement.of(Rule.BED_OVER_BOARD, new Estimate(observed, uncertainty), LIMIT, Certainty.standard(),
+                Optional.empty()).level();
+    }
+}

@@ -220,7 +220,7 @@ public record Branch(Map<String, Node> members) implements Node {
         quantity.entered().ifPresent(text -> members.put("entered", new Text(text)));
         quantity.standardUncertainty().ifPresent(u -> members.put("standardUncertainty", new Decimal(u)));
         quantity.quality().ifPresent(quality -> members.put("quality", new Text(quality.code())));
-        quantity.at().ifPresent(at -> members.put("at", new Text(at.toString())));
+        quantity.at().ifPresent(at -> members.put("at", Node.time(at)));
         quantity.beltState().ifPresent(state -> members.put("beltState", new Text(state.code())));
         return new Branch(members);
     }

@@ -1,6 +1,8 @@
 package bedmark.document;
 
 import java.math.BigDecimal;
+import java.time.OffsetDateTime;
+import java.time.format.DateTimeFormatter;
 import java.util.List;
 import java.util.Objects;
 
@@ -50,6 +52,11 @@ public sealed interface Node permits Branch, Node.Series, Node.Text, Node.Decima
 
     static Node number(long value) {
         return new Decimal(BigDecimal.valueOf(value));
+    }
+
+    /** A time as RFC 3339 writes it, always with its seconds. */
+    static Node time(OffsetDateTime value) {
+        return new Text(DateTimeFormatter.ISO_OFFSET_DATE_TIME.format(value));
     }
 
     static Node flag(boolean value) {

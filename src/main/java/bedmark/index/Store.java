@@ -217,7 +217,7 @@ public final class Store implements AutoCloseable {
         for (Map.Entry<String, Node> member : kept.members().entrySet()) {
             photo = photo.with(member.getKey(), member.getValue());
         }
-        photo = photo.with("takenAt", takenAt.toString());
+        photo = photo.with("takenAt", Node.time(takenAt));
         return append(person, new Act.PhotoAttached(survey, caption.isBlank() ? photo
                 : photo.with("caption", caption)));
     }

@@ -20,7 +20,7 @@ public final class EntryCodec {
     public static byte[] write(Entry entry) {
         return JsonWriter.compact(act(entry.act(), Branch.EMPTY
                 .with("sequence", Node.number(entry.sequence()))
-                .with("at", entry.at().toString())
+                .with("at", Node.time(entry.at()))
                 .with("person", entry.person())
                 .with("device", entry.device().toString())
                 .with("act", entry.act().code())));

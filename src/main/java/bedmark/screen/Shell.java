@@ -16,6 +16,7 @@ import bedmark.screen.zone.ZoneSetting;
 import bedmark.screen.zone.ZoneView;
 import bedmark.survey.SurveyHistory;
 import java.util.function.Supplier;
+import javafx.application.Platform;
 import javafx.scene.Scene;
 import javafx.scene.layout.BorderPane;
 
@@ -86,13 +87,22 @@ public final class Shell implements Navigator {
         root.setTop(screen.head());
         root.setCenter(screen.body());
         root.setBottom(screen.foot());
-        Screen shown = screen;
-        // The focus of the screen before is given up with the next pulse; only then does the new one keep its own.
-        workplace.screen().execute(() -> {
-            if (screen == shown) {
-                shown.shown();
+        afterLayout(screen);
+    }
+
+    /** The focus of the screen before is given up with the next pulse; only then does the new one keep its own. */
+    private void afterLayout(Screen shown) {
+        Runnable once = new Runnable() {
+            @Override
+            public void run() {
+                scene.removePostLayoutPulseListener(this);
+                if (screen == shown) {
+                    shown.shown();
+                }
             }
-        });
+        };
+        scene.addPostLayoutPulseListener(once);
+        Platform.requestNextPulse();
     }
 
     /** Loads the demo plant where the store has none. */

@@ -68,7 +68,7 @@ public record Bundle(Branch document) {
                 .with("format", FORMAT)
                 .with("version", Node.number(VERSION))
                 .with("id", id.toString())
-                .with("createdAt", createdAt.toString())
+                .with("createdAt", Node.time(createdAt))
                 .with("device", device)
                 .with("plant", register.branch("plant").orElse(Branch.EMPTY))
                 .with("forms", new Node.Series(register.series("forms")))

@@ -38,7 +38,7 @@ public record Survey(Branch document) {
                 .with("form", Branch.EMPTY.with("id", formId)
                         .with("version", Node.number(formVersion)))
                 .with("inspector", inspector)
-                .with("startedAt", startedAt.toString())
+                .with("startedAt", Node.time(startedAt))
                 .with("inspectionStatus", InspectionStatus.INSPECTED.code())
                 .with("readings", Branch.EMPTY)
                 .with("observations", Branch.EMPTY));

@@ -104,7 +104,7 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
                     state, changes);
         }
         if (act instanceof Act.SurveyCompleted completed) {
-            Branch signed = survey.document().with("completedAt", entry.at().toString())
+            Branch signed = survey.document().with("completedAt", Node.time(entry.at()))
                     .with("signedOffBy", completed.signedOffBy());
             return new SurveyHistory(base, new Survey(signed), state.moveTo(QueueState.COMPLETED), changes);
         }

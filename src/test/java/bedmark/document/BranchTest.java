@@ -33,6 +33,12 @@ class BranchTest {
     }
 
     @Test
+    void timesAlwaysHaveTheirSeconds() {
+        assertEquals(Node.text("2026-03-01T08:30:00+01:00"),
+                Node.time(OffsetDateTime.parse("2026-03-01T08:30+01:00")));
+    }
+
+    @Test
     void valueIsSetAndTakenAwayAtAPlace() {
         Pointer place = Pointer.parse("/readings/beltSpeed");
         Branch set = Branch.EMPTY.with(place, Node.text("fast"));

@@ -11,7 +11,9 @@ import bedmark.document.Branch;
 import bedmark.index.SurveyLine;
 import bedmark.index.SurveyQuery;
 import bedmark.json.JsonReader;
+import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.Unit;
+import bedmark.screen.part.FieldBox;
 import bedmark.survey.QueueState;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -20,6 +22,7 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.util.HashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.TimeUnit;
@@ -37,6 +40,7 @@ class WholeRoundTest {
     private static final String METRIC = "TP-22";
     private static final String US = "TP-23";
     private static final String LEFT_INCOMPLETE = "TP-24";
+    private static final int MOST_UNITS = 6;
 
     @TempDir
     private Path temp;
@@ -108,28 +112,33 @@ class WholeRoundTest {
             inMetres(app);
             enter(app, length);
         }
-        app.press(KeyCode.DIGIT1);
+        app.type("1");
         enter(app, speed);
-        app.press(KeyCode.DIGIT1);
+        app.type("1");
         inMetres(app);
         enter(app, "1");
         enter(app, depth);
-        seal(app, KeyCode.DIGIT1, geometry.get(0));
+        seal(app, "1", geometry.get(0));
         app.click("add-seals");
-        seal(app, KeyCode.DIGIT2, geometry.get(0));
+        seal(app, "2", geometry.get(0));
     }
 
-    /** Goes on with the key for the unit until the active number is asked in metres. */
     private static void inMetres(TabletApp app) throws Exception {
-        String face = ((javafx.scene.control.Button) app.node("pad-unit")).getText();
-        for (int i = 0; i < face.split("\\|").length && !unit(app).equals("m"); i++) {
+        switchTo(app, "m");
+    }
+
+    /** Goes on with the key for the unit until the active number is asked in that one. */
+    private static void switchTo(TabletApp app, String wanted) throws Exception {
+        for (int i = 0; i < MOST_UNITS && !unit(app).equals(wanted); i++) {
             app.press(KeyCode.U);
         }
-        assertEquals("m", unit(app));
+        assertEquals(wanted, unit(app));
     }
 
     private static String unit(TabletApp app) {
-        return ((Label) app.shell().scene().getRoot().lookup(".field-box:active .unit")).getText();
+        return app.shell().scene().getRoot().lookupAll(".field-box").stream().map(FieldBox.class::cast)
+                .filter(box -> box.activeProperty().get()).map(box -> box.unitProperty().get()).findFirst()
+                .orElseThrow();
     }
 
     private static void enter(TabletApp app, String number) throws Exception {
@@ -137,10 +146,10 @@ class WholeRoundTest {
         app.press(KeyCode.ENTER);
     }
 
-    private static void seal(TabletApp app, KeyCode side, String length) throws Exception {
-        app.press(side);
-        app.press(KeyCode.DIGIT1);
-        app.press(KeyCode.DIGIT1);
+    private static void seal(TabletApp app, String side, String length) throws Exception {
+        app.type(side);
+        app.type("1");
+        app.type("1");
         inMetres(app);
         enter(app, length);
     }
@@ -161,9 +170,7 @@ class WholeRoundTest {
 
     private static void depthInInches(TabletApp app) throws Exception {
         app.click("slot-readings-bedDepths-0-depth");
-        while (!unit(app).equals("in")) {
-            app.press(KeyCode.U);
-        }
+        switchTo(app, "in");
         app.click("pad-digit-3");
         app.click("pad-fraction");
         app.click("pad-fraction");
@@ -207,7 +214,7 @@ class WholeRoundTest {
     }
 
     private static String value(TabletApp app, String id) {
-        return ((Label) app.node(id).lookup(".value")).getText();
+        return ((FieldBox) app.node(id)).valueProperty().get();
     }
 
     private static SurveyLine line(TabletApp app, String transfer) {
@@ -256,7 +263,7 @@ class WholeRoundTest {
             if (shown != null) {
                 double drag = survey.branch("assessment").orElseThrow().number("skirtDragN").orElseThrow()
                         .doubleValue();
-                assertEquals(shown, new bedmark.quantity.QuantityFormat(java.util.Locale.ENGLISH)
+                assertEquals(shown, new QuantityFormat(Locale.ENGLISH)
                         .computed(drag, Unit.NEWTON));
                 compared++;
             }

@@ -37,6 +37,7 @@ import javafx.scene.layout.VBox;
 /** Where the active cell is filled in: the pad for numbers, buttons for choices, the keyboard for words. */
 final class EntryPane extends StackPane {
     private static final int COLUMNS = 2;
+    private static final int LONGEST_FACE = 7;
 
     private final ZoneModel model;
     private final Wording wording;
@@ -50,7 +51,7 @@ final class EntryPane extends StackPane {
         this.numericPad = new NumericPad(pad, words(wording));
         getStyleClass().add("entry-pane");
         listening.to(model.inHandProperty(), inHand -> show(inHand.slot()));
-        listening.onChange(model.typedProperty(), typed -> typed());
+        listening.onChange(model.typedProperty(), typed -> taken());
         listening.onChange(model.surveyProperty(), survey -> chosen());
     }
 
@@ -58,26 +59,31 @@ final class EntryPane extends StackPane {
     void listenIn(Parent part) {
         PadKeyboard.listen(part, pad);
         part.addEventHandler(KeyEvent.KEY_PRESSED, this::pressed);
+        part.addEventHandler(KeyEvent.KEY_TYPED, this::typed);
     }
 
-    /** Where no number is typed: Enter goes on, Shift-Enter back, and a digit takes the choice of that place. */
+    /** Where no number is typed, Enter goes on and Shift-Enter back. */
     private void pressed(KeyEvent event) {
-        if (pad.setupProperty().get().isPresent() || event.getTarget() instanceof TextInputControl
-                || event.getTarget() instanceof Button) {
-            return;
-        }
-        if (event.getCode() == KeyCode.ENTER) {
+        if (event.getCode() == KeyCode.ENTER && isFree(event)) {
             move(event.isShiftDown());
             event.consume();
-        } else if (event.getCode().isDigitKey() || event.getCode().isKeypadKey()) {
-            lookupAll(".choice").stream().skip(Math.max(0, digit(event) - 1L)).findFirst()
-                    .filter(choice -> digit(event) > 0).ifPresent(choice -> ((Button) choice).fire());
+        }
+    }
+
+    /** Where no number is typed, a digit takes the choice of that place. */
+    private void typed(KeyEvent event) {
+        int digit = event.getCharacter().length() == 1 ? Character.digit(event.getCharacter().charAt(0), 10) : 0;
+        if (digit > 0 && isFree(event)) {
+            lookupAll(".choice").stream().skip(digit - 1L).findFirst()
+                    .ifPresent(choice -> ((Button) choice).fire());
             event.consume();
         }
     }
 
-    private static int digit(KeyEvent event) {
-        return event.getText().length() == 1 ? Character.digit(event.getText().charAt(0), 10) : 0;
+    /** The pad may have used the key and led on to a cell that has no pad: all handlers of one node hear of a key. */
+    private boolean isFree(KeyEvent event) {
+        return !event.isConsumed() && pad.setupProperty().get().isEmpty() && !(event.getTarget() instanceof TextInputControl)
+                && !(event.getTarget() instanceof Button);
     }
 
     private void move(boolean back) {
@@ -135,12 +141,18 @@ final class EntryPane extends StackPane {
             String step = wording.format().exact(measured.measure().step(unit));
             List<Unit> units = measured.measure().units();
             return new PadSetup(sign, false, unit == Unit.INCH, Optional.of(new PadSetup.Steps("\u2212" + step,
-                    "+" + step)), units.size() < 2 ? Optional.empty() : Optional.of(units.stream()
-                    .map(wording::symbol).limit(3).collect(Collectors.joining(" | "))));
+                    "+" + step)), units.size() < 2 ? Optional.empty() : Optional.of(unitFace(units, unit)));
         }
         String step = wording.format().exact(((Slot.CountSlot) slot).count().step());
         return new PadSetup(sign, false, false, Optional.of(new PadSetup.Steps("\u2212" + step, "+" + step)),
                 Optional.empty());
+    }
+
+    /** All units where they fit on the key, else the one that it goes on to. */
+    private String unitFace(List<Unit> units, Unit now) {
+        String all = units.stream().map(wording::symbol).collect(Collectors.joining(" | "));
+        return all.length() <= LONGEST_FACE ? all
+                : wording.symbol(units.get((units.indexOf(now) + 1) % units.size()));
     }
 
     private void command(PadCommand command) {
@@ -165,7 +177,7 @@ final class EntryPane extends StackPane {
     }
 
     /** A number that came from elsewhere: a step, an undo, the picture. */
-    private void typed() {
+    private void taken() {
         if (!editing && pad.setupProperty().get().isPresent()) {
             pad.take(model.editable());
         }
@@ -196,11 +208,8 @@ final class EntryPane extends StackPane {
             boolean chosen = answer.equals(Optional.of(node));
             ActionButton button = new ActionButton(chosen ? Weight.PRIMARY : Weight.PLAIN,
                     choice.label().in(wording.words().language()), () -> {
-                        model.set(slot, chosen && !(slot instanceof Slot.WaySlot) ? Optional.empty()
-                                : Optional.of(node));
-                        if (!chosen) {
-                            model.next();
-                        }
+                        model.set(slot, Optional.of(node));
+                        model.next();
                     });
             button.setId("choice-" + choice.code());
             button.getStyleClass().add("choice");
@@ -264,7 +273,7 @@ final class EntryPane extends StackPane {
         return pane;
     }
 
-    /** Back, undo and next, as on the pad. */
+    /** Back, clear, undo and next, as on the pad. */
     private HBox moves() {
         ActionButton next = new ActionButton(Weight.PRIMARY, wording.text("screen.pad.next"), model::next);
         next.setId("entry-next");
@@ -272,9 +281,11 @@ final class EntryPane extends StackPane {
         undo.setId("entry-undo");
         ActionButton back = new ActionButton(Weight.PLAIN, wording.text("screen.pad.back"), model::back);
         back.setId("entry-back");
-        HBox moves = new HBox(back, undo, next);
+        ActionButton clear = new ActionButton(Weight.PLAIN, wording.text("screen.pad.clear"), model::clear);
+        clear.setId("entry-clear");
+        HBox moves = new HBox(back, clear, undo, next);
         moves.getStyleClass().add("moves");
-        for (Button button : List.of(back, undo, next)) {
+        for (Button button : List.of(back, clear, undo, next)) {
             button.setMaxWidth(Double.MAX_VALUE);
             button.setPrefWidth(100);
             HBox.setHgrow(button, Priority.ALWAYS);

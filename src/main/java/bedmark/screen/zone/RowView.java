@@ -148,7 +148,8 @@ final class RowView extends VBox {
             box.unitProperty().set(unit == null ? "" : wording.symbol(unit));
         } else {
             Optional<Node> answer = model.answer(slot);
-            SlotWords.Shown shown = words.shown(slot, answer);
+            SlotWords.Shown shown = active ? words.shownIn(slot, answer, Optional.ofNullable(unit))
+                    : words.shown(slot, answer);
             box.valueProperty().set(shown.value());
             box.unitProperty().set(shown.unit().isEmpty() && unit != null ? wording.symbol(unit) : shown.unit());
         }

@@ -45,7 +45,7 @@ public sealed interface Slot {
     record FlagSlot(Field field, Pointer where, Texts label) implements Slot {
     }
 
-    /** The way in which the speed is read; choosing one leads to its own cells. */
+    /** The way in which the speed is read, a place of its own; choosing one leads to the cells of that way. */
     record WaySlot(SpeedField field, Pointer where, Texts label, List<Choice> choices) implements Slot {
         public WaySlot {
             choices = List.copyOf(choices);

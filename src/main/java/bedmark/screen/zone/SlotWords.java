@@ -41,6 +41,15 @@ final class SlotWords {
         return answer.map(node -> shown(slot, node)).orElse(Shown.NOTHING);
     }
 
+    /** The same in the unit that the person types in now, so that switching it shows what the number comes to. */
+    Shown shownIn(Slot slot, Optional<Node> answer, Optional<Unit> unit) {
+        Optional<Quantity> quantity = answer.flatMap(SlotWords::quantity);
+        boolean fits = quantity.isPresent() && unit.filter(wanted -> wanted != quantity.get().unit()
+                && wanted.dimension() == quantity.get().unit().dimension()).isPresent();
+        return fits ? new Shown(wording.format().in(unit.get(), quantity.get()), wording.symbol(unit.get()))
+                : shown(slot, answer);
+    }
+
     private Shown shown(Slot slot, Node node) {
         if (slot instanceof Slot.MeasureSlot) {
             return quantity(node).map(quantity -> new Shown(wording.format().entered(quantity),

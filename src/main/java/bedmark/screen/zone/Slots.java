@@ -87,7 +87,7 @@ final class Slots {
                 new Choice(Way.TIMED.key(), field.timed().label()),
                 new Choice(Way.PULLEY.key(), field.pulley().label()));
         rows.add(row(section, field, field.where().child("way"),
-                new Slot.WaySlot(field, field.where(), field.head().label(), choices)));
+                new Slot.WaySlot(field, field.where().child("way"), field.head().label(), choices)));
         Way way = ways.of(field);
         switch (way) {
             case DIRECT -> rows.add(row(section, field, way.where(), new Slot.MeasureSlot(field, way.where(),

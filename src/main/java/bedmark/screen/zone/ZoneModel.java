@@ -344,7 +344,9 @@ public final class ZoneModel {
     /** Clears the active cell. */
     public void clear() {
         typed.set("");
-        set(active(), Optional.empty());
+        if (!(active() instanceof Slot.WaySlot)) {
+            set(active(), Optional.empty());
+        }
     }
 
     private void set(Pointer where, Optional<Node> answer) {

@@ -256,9 +256,14 @@ public final class Store implements AutoCloseable {
         }
     }
 
-    /** Where the file of a photo of a survey lies; nothing where its document names none of this store. */
-    public Optional<Path> photoFile(Branch photo) {
-        return shelf.file(photo);
+    /**
+     * Where the file of a photo of a survey lies.
+     *
+     * @throws Refused {@code photo-missing} where the photo's document names no file of this store
+     */
+    public Path photoFile(Branch photo) {
+        return shelf.file(photo).orElseThrow(() ->
+                new Refused(Defect.in(photo.text("file").orElse(""), "photo-missing")));
     }
 
     /** The latest register: {@code plant}, {@code forms}, {@code rounds}. */

@@ -198,7 +198,7 @@ class StoreTest {
         Path source = Files.write(folder.resolve("camera.JPG"), PHOTO);
         Entry entry = store.attachPhoto(source, id(1), PERSON, NOON, "left skirt");
         Branch photo = ((Act.PhotoAttached) entry.act()).photo();
-        Path file = store.photoFile(photo).orElseThrow();
+        Path file = store.photoFile(photo);
         assertArrayEquals(PHOTO, Files.readAllBytes(file));
         assertArrayEquals(PHOTO, Files.readAllBytes(source));
         assertEquals("left skirt", photo.text("caption").orElseThrow());
@@ -208,7 +208,8 @@ class StoreTest {
         try (var files = Files.list(folder.resolve("photos"))) {
             assertEquals(1, files.count());
         }
-        assertEquals(Optional.empty(), store.photoFile(Branch.EMPTY.with("file", "photos/../device.json")));
+        assertEquals("photo-missing", assertThrows(Refused.class, () ->
+                store.photoFile(Branch.EMPTY.with("file", "photos/../device.json"))).defect().code());
     }
 
     @Test

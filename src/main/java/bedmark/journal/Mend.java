@@ -104,7 +104,8 @@ final class Mend {
         }
         try {
             if (unproven.isEmpty()) {
-                return !newest ? Optional.empty() : Optional.of(SegmentWriter.goOn(files, SegmentFile.look(files, last.path(), last.number())));
+                return !newest ? Optional.empty()
+                        : Optional.of(SegmentWriter.goOn(files, SegmentFile.look(files, last.path(), last.number())));
             }
             Frame copied = unproven.get();
             return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(SegmentHeader.Follows.ABANDONED,
@@ -135,7 +136,11 @@ final class Mend {
             long end = torn.offset() + torn.length();
             while (at < end) {
                 ByteBuffer bytes = ByteBuffer.allocate((int) Math.min(1 << 20, end - at));
-                at += input.read(at, bytes);
+                int count = input.read(at, bytes);
+                if (count == 0) {
+                    throw new IOException("the file became shorter while it was read");
+                }
+                at += count;
                 output.write(bytes.flip());
             }
             output.force();

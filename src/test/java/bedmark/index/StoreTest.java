@@ -177,6 +177,7 @@ class StoreTest {
         refused("act-unfit", new Act.SurveysQueued(List.of(id(1))));
         refused("act-without-survey", new Act.SurveysQueued(List.of()));
         refused("act-unfit", new Act.AnswerUndone(id(1), 1));
+        refused("photo-missing", new Act.PhotoAttached(id(1), Branch.EMPTY.with("file", "photos/a.jpg")));
         refused("act-unfit", StoreScript.answer(id(1), "/transfer", Node.text("T2")));
         refused("word-unknown", StoreScript.answer(id(1), "/inspectionStatus", Node.text("perhaps")));
         refused("revision-unfit", revision(id(2), store.history(id(1)).orElseThrow().survey()));

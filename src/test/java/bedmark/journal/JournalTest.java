@@ -32,6 +32,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
 class JournalTest {
+    private static final int FLIP_EVERY = Integer.getInteger("bedmark.journal.flip.every", 3);
+
     @TempDir
     Path folder;
 
@@ -184,6 +186,25 @@ class JournalTest {
             codes.addAll(codesAfterFlip(segment, whole, at));
         }
         assertEquals(Set.of("journal-header-damaged"), codes);
+    }
+
+    @Test
+    void noFlippedBitAnywhereIsSilent() throws IOException {
+        write(folder, 20);
+        for (SegmentFile segment : SegmentFile.list(FileLayer.disk(), folder)) {
+            byte[] whole = Files.readAllBytes(segment.path());
+            for (int at = 0; at < whole.length; at += FLIP_EVERY) {
+                byte[] flipped = whole.clone();
+                flipped[at] ^= (byte) (1 << at % 8);
+                Files.write(segment.path(), flipped);
+                Read read = new Read();
+                JournalProof proof = prove(folder, read);
+                int place = at;
+                assertTrue(!read.flaws.isEmpty() || proof.tail().isPresent(), () -> segment.name() + " byte " + place);
+                assertTrue(read.entries.size() >= 19, () -> segment.name() + " byte " + place);
+            }
+            Files.write(segment.path(), whole);
+        }
     }
 
     private List<String> codesAfterFlip(Path segment, byte[] whole, int at) throws IOException {

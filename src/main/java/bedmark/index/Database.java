@@ -121,49 +121,54 @@ final class Database implements AutoCloseable {
     }
 
     <T> List<T> rows(String sql, RowReader<T> reader, Object... arguments) {
-        try {
-            PreparedStatement statement = prepared(sql, arguments);
+        return guarded(() -> {
             List<T> rows = new ArrayList<>();
-            try (ResultSet result = statement.executeQuery()) {
+            try (ResultSet result = prepared(sql, arguments).executeQuery()) {
                 while (result.next()) {
                     rows.add(reader.read(result));
                 }
             }
             return rows;
-        } catch (SQLException e) {
-            throw new IndexBroken(e);
-        }
+        });
     }
 
-    void run(String sql, Object... arguments) {
-        try {
-            prepared(sql, arguments).executeUpdate();
-        } catch (SQLException e) {
-            throw new IndexBroken(e);
-        }
+    int run(String sql, Object... arguments) {
+        return guarded(() -> prepared(sql, arguments).executeUpdate());
     }
 
     /** Takes a row into the statement's batch. */
     void batch(String sql, Object... arguments) {
-        try {
-            prepared(sql, arguments).addBatch();
-        } catch (SQLException e) {
-            throw new IndexBroken(e);
-        }
+        guarded(() -> {
+            PreparedStatement statement = prepared(sql, arguments);
+            statement.addBatch();
+            return statement;
+        });
     }
 
-    void runBatch(String sql) {
-        try {
-            prepared(sql).executeBatch();
-        } catch (SQLException e) {
-            throw new IndexBroken(e);
-        }
+    int[] runBatch(String sql) {
+        return guarded(() -> prepared(sql).executeBatch());
     }
 
     void commit() {
-        try {
+        guarded(() -> {
             connection.commit();
-        } catch (SQLException e) {
+            return connection;
+        });
+    }
+
+    /** Work on the database. */
+    @FunctionalInterface
+    private interface Work<T> {
+        T run() throws SQLException;
+    }
+
+    /** A damaged file makes the database, or whoever reads its rows, fail in ways that nobody wraps. */
+    private static <T> T guarded(Work<T> work) {
+        try {
+            return work.run();
+        } catch (IndexBroken e) {
+            throw e;
+        } catch (SQLException | RuntimeException | OutOfMemoryError | StackOverflowError e) {
             throw new IndexBroken(e);
         }
     }

@@ -33,6 +33,7 @@ final class Index implements AutoCloseable {
     private final Histories histories = new Histories(this::entriesOf);
     private final Set<UUID> changed = new LinkedHashSet<>();
     private Optional<Branch> register = Optional.empty();
+    private boolean registerRead;
     private Optional<Mark> newest;
     private UUID journal;
     private long entries;
@@ -74,10 +75,7 @@ final class Index implements AutoCloseable {
         if (counted != expected) {
             throw new IndexBroken("the index holds " + counted + " entries instead of " + expected);
         }
-        Index index = new Index(database, levels, source, journal, marks.stream().map(Marked::mark).findFirst(),
-                expected);
-        index.register = index.readRegister();
-        return index;
+        return new Index(database, levels, source, journal, marks.stream().map(Marked::mark).findFirst(), expected);
     }
 
     private record Marked(Mark mark, long entries) {
@@ -159,6 +157,7 @@ final class Index implements AutoCloseable {
         if (act instanceof Act.RegisterTaken taken) {
             pushSurveys();
             register = Optional.of(taken.register());
+            registerRead = true;
             database.batch(LANDMARK, act.code(), entry.sequence());
         } else if (act instanceof Act.PackExported) {
             database.batch(LANDMARK, act.code(), entry.sequence());
@@ -206,8 +205,9 @@ final class Index implements AutoCloseable {
     }
 
     private String level(SurveyHistory history) {
+        Branch known = register().orElse(Branch.EMPTY);
         try {
-            return levels.level(history.survey().document(), register.orElse(Branch.EMPTY));
+            return levels.level(history.survey().document(), known);
         } catch (RuntimeException e) {
             // What can't be judged has no level; the entry is saved all the same.
             return "";
@@ -219,13 +219,15 @@ final class Index implements AutoCloseable {
         return histories.of(survey);
     }
 
+    /** The latest register; read from the journal when it is first asked for. */
     Optional<Branch> register() {
+        if (!registerRead) {
+            pushRows();
+            register = landmarks("register-taken", 1).stream().findFirst()
+                    .map(entry -> ((Act.RegisterTaken) entry.act()).register());
+            registerRead = true;
+        }
         return register;
-    }
-
-    private Optional<Branch> readRegister() {
-        return landmarks("register-taken", 1).stream().findFirst()
-                .map(entry -> ((Act.RegisterTaken) entry.act()).register());
     }
 
     /** The newest entries of one kind, newest first. */

@@ -38,6 +38,7 @@ final class Ledger implements AutoCloseable {
     private final List<Defect> found = new ArrayList<>();
     private Optional<Index> index = Optional.empty();
     private Optional<Journal> journal = Optional.empty();
+    private boolean begunAnew;
     private boolean rebuilt;
     private long replayed;
 
@@ -52,7 +53,7 @@ final class Ledger implements AutoCloseable {
     /**
      * Opens both.
      *
-     * @param afresh throws the index away first
+     * @param afresh makes the index anew in any case
      */
     static Ledger open(Path folder, StoreOptions options, boolean afresh) throws IOException {
         Ledger ledger = new Ledger(folder, options);
@@ -67,8 +68,7 @@ final class Ledger implements AutoCloseable {
 
     private void open(boolean afresh) throws IOException {
         files.createFolder(indexFolder);
-        boolean known = !afresh && files.exists(indexFolder.resolve(Database.NAME + ".mv.db"));
-        if (known) {
+        if (files.exists(indexFolder.resolve(Database.NAME + ".mv.db"))) {
             openIndex();
         }
         Optional<Mark> mark = index.flatMap(Index::mark);
@@ -76,6 +76,10 @@ final class Ledger implements AutoCloseable {
                 new CatchUp());
         journal = Optional.of(opened);
         found.addAll(opened.found());
+        rebuilt |= begunAnew && replayed > 0;
+        if (afresh && !rebuilt) {
+            rebuild(this::afresh);
+        }
         ask(Index::mark);
     }
 
@@ -93,7 +97,8 @@ final class Ledger implements AutoCloseable {
     private final class CatchUp implements Replay {
         @Override
         public void begin(UUID identity, boolean resumed) {
-            if (!resumed) {
+            begunAnew = !resumed;
+            if (begunAnew) {
                 afresh(identity);
             }
         }

@@ -163,10 +163,13 @@ public final class Store implements AutoCloseable {
      * @return the entry with its sequence number and time
      * @throws NotSaved where it is not on the medium
      * @throws Refused  {@code survey-unknown}, {@code survey-known}, {@code act-unfit}, {@code revision-unfit},
-     *                  {@code act-without-survey}, {@code entry-too-large}, or what is wrong in a document: the act
+     *                  {@code act-without-survey}, {@code photo-missing}, {@code entry-too-large}, or what is wrong in a document: the act
      *                  is impossible as things stand, and nothing was written
      */
     public Entry append(String person, Act act) {
+        if (act instanceof Act.PhotoAttached attached && !options.files().exists(photoFile(attached.photo()))) {
+            throw new Refused(Defect.in(attached.photo().text("file").orElse(""), "photo-missing"));
+        }
         AtomicReference<Optional<Journal.Saved>> saved = new AtomicReference<>(Optional.empty());
         try {
             Entry entry = desk.callThen(() -> {
@@ -256,9 +259,14 @@ public final class Store implements AutoCloseable {
         }
     }
 
-    /** Where the file of a photo of a survey lies; nothing where its document names none of this store. */
-    public Optional<Path> photoFile(Branch photo) {
-        return shelf.file(photo);
+    /**
+     * Where the file of a photo of a survey lies.
+     *
+     * @throws Refused {@code photo-missing} where the photo's document names no file of this store
+     */
+    public Path photoFile(Branch photo) {
+        return shelf.file(photo).orElseThrow(() ->
+                new Refused(Defect.in(photo.text("file").orElse(""), "photo-missing")));
     }
 
     /** The latest register: {@code plant}, {@code forms}, {@code rounds}. */

@@ -88,7 +88,18 @@ final class DiskLayer implements FileLayer {
             return;
         }
         try (FileChannel channel = FileChannel.open(folder, StandardOpenOption.READ)) {
-            channel.force(true);
+            force(channel);
+        }
+    }
+
+    /** Some file systems, of sticks and networks, know no forcing of a folder and say that the request is invalid. */
+    private static void force(FileChannel folder) throws IOException {
+        try {
+            folder.force(true);
+        } catch (IOException e) {
+            if (!String.valueOf(e.getMessage()).contains("Invalid argument")) {
+                throw e;
+            }
         }
     }
 

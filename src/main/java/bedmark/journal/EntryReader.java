@@ -34,9 +34,7 @@ public final class EntryReader implements AutoCloseable {
      */
     public Entry read(long sequence, Place place) {
         try {
-            ByteBuffer bytes = ByteBuffer.allocate(Math.min(place.length(), Frame.HEAD + Frame.LONGEST_PAYLOAD));
-            input(place.segment()).read(place.offset(), bytes);
-            bytes.flip();
+            ByteBuffer bytes = bytes(place);
             Optional<Frame> frame = Frame.decode(bytes).filter(one -> one.sequence() == sequence);
             if (frame.isPresent() && Digest.of(bytes).equals(place.hash())) {
                 return EntryCodec.read(frame.get().payload());
@@ -46,6 +44,14 @@ public final class EntryReader implements AutoCloseable {
         }
         throw new Refused(Defect.in(SegmentFile.path(folder, place.segment()).getFileName().toString(),
                 "journal-entry-damaged", Long.toString(place.offset()), Long.toString(sequence)));
+    }
+
+    private ByteBuffer bytes(Place place) throws IOException {
+        ByteBuffer bytes = ByteBuffer.allocate(Math.min(place.length(), Frame.HEAD + Frame.LONGEST_PAYLOAD));
+        if (files.exists(SegmentFile.path(folder, place.segment())) || !files.exists(folder)) {
+            input(place.segment()).read(place.offset(), bytes);
+        }
+        return bytes.flip();
     }
 
     private FileLayer.Input input(int segment) throws IOException {

@@ -4,23 +4,22 @@ import bedmark.document.Defect;
 import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
 /**
  * Brings the last segment of a journal into a state in which it can be written on: cuts a torn tail off and keeps it,
- * leaves damage alone, and copies what is not known to be on the medium into a segment of its own.
+ * leaves damage alone, and copies the last entry into a segment of its own where nobody knows it to be saved. Its force
+ * may have failed; what is read back of it then comes from memory, and a second force would succeed without writing it.
+ * Every earlier entry was followed by another one in the same file, so its force succeeded.
  */
 final class Mend {
-    private static final int COPIED_AT_MOST = 8 << 20;
-
     private final FileLayer files;
     private final Path folder;
     private final SegmentFile last;
     private final Optional<Mark> resumed;
     private final List<Defect> found;
-    private final List<Frame> unproven = new ArrayList<>();
+    private Optional<Frame> unproven = Optional.empty();
     private long sequence;
     private boolean sealed;
     private boolean damaged;
@@ -44,7 +43,6 @@ final class Mend {
         Optional<Mark> inside = resumed.filter(mark -> mark.place().segment() == last.number());
         long from = inside.map(mark -> mark.place().end()).orElse(last.start());
         sequence = inside.map(Mark::sequence).orElse(last.first().orElse(1L) - 1);
-        long copied = 0;
         try (SegmentReader reader = new SegmentReader(files, last.path(), from, last.size())) {
             for (Optional<Found> next = reader.next(); next.isPresent(); next = reader.next()) {
                 damaged |= tail.isPresent();
@@ -53,17 +51,11 @@ final class Mend {
                     tail = Optional.of(bad);
                 } else if (next.get() instanceof Found.Good good && good.frame().kind() == Frame.Kind.ENTRY) {
                     sequence = Math.max(sequence, good.frame().sequence());
-                    copied += good.length();
-                    if (resumed.isPresent() && copied <= COPIED_AT_MOST) {
-                        unproven.add(good.frame());
-                    }
+                    unproven = Optional.of(good.frame());
                 } else {
                     sealed = true;
                 }
             }
-        }
-        if (copied > COPIED_AT_MOST) {
-            unproven.clear();
         }
         return this;
     }
@@ -112,11 +104,12 @@ final class Mend {
         }
         try {
             if (unproven.isEmpty()) {
-                return !newest ? Optional.empty() : Optional.of(SegmentWriter.goOn(files, SegmentFile.look(files, last.path(), last.number())));
+                return !newest ? Optional.empty()
+                        : Optional.of(SegmentWriter.goOn(files, SegmentFile.look(files, last.path(), last.number())));
             }
-            Frame first = unproven.get(0);
+            Frame copied = unproven.get();
             return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(SegmentHeader.Follows.ABANDONED,
-                    header.get().journal(), number, first.sequence(), first.previous()), unproven));
+                    header.get().journal(), number, copied.sequence(), copied.previous()), copied));
         } catch (IOException e) {
             // What is read stays readable; the next entry begins a segment of its own, and says so if it can't.
             return Optional.empty();
@@ -143,7 +136,11 @@ final class Mend {
             long end = torn.offset() + torn.length();
             while (at < end) {
                 ByteBuffer bytes = ByteBuffer.allocate((int) Math.min(1 << 20, end - at));
-                at += input.read(at, bytes);
+                int count = input.read(at, bytes);
+                if (count == 0) {
+                    throw new IOException("the file became shorter while it was read");
+                }
+                at += count;
                 output.write(bytes.flip());
             }
             output.force();

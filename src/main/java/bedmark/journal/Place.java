@@ -13,6 +13,9 @@ import java.util.Objects;
 public record Place(int segment, long offset, int length, Digest hash) {
     public Place {
         Objects.requireNonNull(hash);
+        if (segment < 1 || offset < 0 || length < 0) {
+            throw new IllegalArgumentException("no place in a journal: " + segment + ", " + offset + ", " + length);
+        }
     }
 
     /** Where the next entry begins, or the segment ends. */

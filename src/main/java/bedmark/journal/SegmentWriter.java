@@ -5,7 +5,6 @@ import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
-import java.util.List;
 
 /** Writes a segment at its end. After any failure it is closed and its file is never written again. */
 final class SegmentWriter implements Closeable {
@@ -38,23 +37,19 @@ final class SegmentWriter implements Closeable {
         }
     }
 
-    /** Makes a new segment that appears in one step together with frames that it holds from the start. */
-    static SegmentWriter create(FileLayer files, Path folder, SegmentHeader header, List<Frame> frames)
-            throws IOException {
+    /** Makes a new segment that appears in one step together with its first entry. */
+    static SegmentWriter create(FileLayer files, Path folder, SegmentHeader header, Frame first) throws IOException {
         Path file = SegmentFile.path(folder, header.number());
         Path part = folder.resolve(file.getFileName() + Journal.PART);
-        long size = SegmentHeader.LENGTH;
         FileLayer.Output output = files.create(part);
         try {
             output.write(header.encode());
-            for (Frame frame : frames) {
-                output.write(frame.encode());
-                size += frame.length();
-            }
+            output.write(first.encode());
             force(output);
             files.move(part, file);
             files.forceFolder(folder);
-            return new SegmentWriter(files, file, header.number(), output, size);
+            return new SegmentWriter(files, file, header.number(), output,
+                    SegmentHeader.LENGTH + (long) first.length());
         } catch (IOException e) {
             discard(files, output, part, e);
             throw e;

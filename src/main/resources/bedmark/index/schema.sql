@@ -38,6 +38,7 @@ create table touch (
   sequence_no bigint not null,
   primary key (survey, sequence_no)
 );
+create index touch_entry on touch (sequence_no);
 
 -- Entries that are looked for by what they are: registers and packs.
 create table landmark (
@@ -45,6 +46,7 @@ create table landmark (
   sequence_no bigint not null,
   primary key (act, sequence_no)
 );
+create index landmark_entry on landmark (sequence_no);
 
 -- The newest walk of a round: the entries that started and finished it.
 create table walk (

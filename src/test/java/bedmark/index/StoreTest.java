@@ -177,6 +177,7 @@ class StoreTest {
         refused("act-unfit", new Act.SurveysQueued(List.of(id(1))));
         refused("act-without-survey", new Act.SurveysQueued(List.of()));
         refused("act-unfit", new Act.AnswerUndone(id(1), 1));
+        refused("photo-missing", new Act.PhotoAttached(id(1), Branch.EMPTY.with("file", "photos/a.jpg")));
         refused("act-unfit", StoreScript.answer(id(1), "/transfer", Node.text("T2")));
         refused("word-unknown", StoreScript.answer(id(1), "/inspectionStatus", Node.text("perhaps")));
         refused("revision-unfit", revision(id(2), store.history(id(1)).orElseThrow().survey()));
@@ -198,7 +199,7 @@ class StoreTest {
         Path source = Files.write(folder.resolve("camera.JPG"), PHOTO);
         Entry entry = store.attachPhoto(source, id(1), PERSON, NOON, "left skirt");
         Branch photo = ((Act.PhotoAttached) entry.act()).photo();
-        Path file = store.photoFile(photo).orElseThrow();
+        Path file = store.photoFile(photo);
         assertArrayEquals(PHOTO, Files.readAllBytes(file));
         assertArrayEquals(PHOTO, Files.readAllBytes(source));
         assertEquals("left skirt", photo.text("caption").orElseThrow());
@@ -208,7 +209,8 @@ class StoreTest {
         try (var files = Files.list(folder.resolve("photos"))) {
             assertEquals(1, files.count());
         }
-        assertEquals(Optional.empty(), store.photoFile(Branch.EMPTY.with("file", "photos/../device.json")));
+        assertEquals("photo-missing", assertThrows(Refused.class, () ->
+                store.photoFile(Branch.EMPTY.with("file", "photos/../device.json"))).defect().code());
     }
 
     @Test

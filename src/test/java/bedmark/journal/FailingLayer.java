@@ -9,7 +9,7 @@ import java.util.Optional;
 
 /** A disk whose Nth operation fails, once or with all that come after it. A failing write leaves half its bytes. */
 public final class FailingLayer implements FileLayer {
-    private final FileLayer disk = FileLayer.disk();
+    private final FileLayer disk = new QuickLayer();
     private final long failing;
     private final boolean forGood;
     private final String message;

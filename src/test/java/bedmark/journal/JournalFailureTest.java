@@ -86,7 +86,7 @@ class JournalFailureTest {
     }
 
     private static void assertEverySavedEntryIsThere(Path home, Told told, String where) throws IOException {
-        try (Journal journal = open(home, FileLayer.disk(), told.known, new Read())) {
+        try (Journal journal = open(home, new QuickLayer(), told.known, new Read())) {
             Journal.Saved more = append(journal, 99);
             told.saved.put(more.entry().sequence(), more.entry());
         }

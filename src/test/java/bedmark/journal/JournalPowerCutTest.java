@@ -19,6 +19,8 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
 import java.util.TreeMap;
+import java.util.concurrent.atomic.AtomicBoolean;
+import java.util.function.Supplier;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -84,6 +86,52 @@ class JournalPowerCutTest {
             for (Fate fate : List.of(Fate.LOST, Fate.KEPT, Fate.MIXED, Fate.MIXED, Fate.MIXED)) {
                 check(disk, cut, fate, told, random);
             }
+        }
+    }
+
+    @Test
+    void aFileWhoseForceFailedIsNeverTrustedAgain() throws IOException {
+        for (int failing = 2; failing < 12; failing++) {
+            for (int last : new int[] {failing, 1000}) {
+                int from = failing;
+                Path home = Files.createDirectories(folder.resolve("live" + failing + "-" + last));
+                AtomicBoolean mended = new AtomicBoolean();
+                PowerCutDisk disk = new PowerCutDisk(home, n -> n >= from && n <= last && !mended.get());
+                Map<Long, Entry> saved = new TreeMap<>();
+                Optional<Mark> known = Optional.empty();
+                try (Journal journal = open(home, disk, Optional.empty(), new Read())) {
+                    for (int i = 1; i <= 8; i++) {
+                        known = appended(journal, i, saved).or(kept(known));
+                    }
+                }
+                mended.set(true);
+                Read shown = new Read();
+                try (Journal journal = open(home, disk, known, shown)) {
+                    appended(journal, 99, saved);
+                }
+                shown.entries.forEach(entry -> saved.put(entry.sequence(), entry));
+                Path image = folder.resolve("image" + images++);
+                disk.layOut(disk.operations(), Fate.LOST, new Random(1), image);
+                Read read = new Read();
+                prove(image, read);
+                Map<Long, Entry> there = new TreeMap<>();
+                read.entries.forEach(entry -> there.put(entry.sequence(), entry));
+                assertEquals(saved, there, "force " + failing + " to " + last);
+            }
+        }
+    }
+
+    private static Supplier<Optional<Mark>> kept(Optional<Mark> mark) {
+        return () -> mark;
+    }
+
+    private static Optional<Mark> appended(Journal journal, int number, Map<Long, Entry> saved) {
+        try {
+            Journal.Saved done = append(journal, number);
+            saved.put(done.entry().sequence(), done.entry());
+            return Optional.of(new Mark(journal.identity(), done.entry().sequence(), done.place()));
+        } catch (NotSaved e) {
+            return Optional.empty();
         }
     }
 

@@ -95,12 +95,14 @@ final class JournalScript {
 
     static Read read(Path folder) throws IOException {
         Read read = new Read();
-        open(folder, read).close();
+        prove(folder, read);
         return read;
     }
 
     /** What a proof says, with the flaws and the entries that it met. */
     static JournalProof prove(Path folder, Read read) throws IOException {
+        SegmentFile.reference(SegmentFile.list(FileLayer.disk(), folder)).ifPresent(header ->
+                read.begin(header.journal(), false));
         return JournalProof.of(folder, FileLayer.disk(), Optional.empty(), read);
     }
 }

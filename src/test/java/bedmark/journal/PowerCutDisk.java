@@ -12,6 +12,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
+import java.util.concurrent.atomic.AtomicInteger;
+import java.util.function.IntPredicate;
 import java.util.stream.Stream;
 
 /**
@@ -38,6 +40,9 @@ public final class PowerCutDisk implements FileLayer {
         /** A file's bytes and length are on the medium. */
         record Forced(Contents contents) implements Step { }
 
+        /** A force failed; the system forgets that these bytes still have to be written. */
+        record ForceFailed(Contents contents) implements Step { }
+
         /** A name takes the place of another one. */
         record Moved(Path from, Path to, Contents contents) implements Step { }
 
@@ -58,12 +63,22 @@ public final class PowerCutDisk implements FileLayer {
     private final Map<Path, Contents> first = new HashMap<>();
     private final Map<Contents, byte[]> firstBytes = new HashMap<>();
     private final List<Step> steps = new ArrayList<>();
+    private final IntPredicate failing;
+    private final AtomicInteger forces = new AtomicInteger();
 
     /**
      * @param root the folder under which everything happens; what is there already counts as forced
      */
     public PowerCutDisk(Path root) throws IOException {
+        this(root, force -> false);
+    }
+
+    /**
+     * @param failing which forces of files fail, counted from 1
+     */
+    public PowerCutDisk(Path root, IntPredicate failing) throws IOException {
         this.root = root;
+        this.failing = failing;
         try (Stream<Path> files = Files.walk(root)) {
             for (Path file : files.filter(Files::isRegularFile).toList()) {
                 Contents contents = new Contents();
@@ -72,6 +87,11 @@ public final class PowerCutDisk implements FileLayer {
                 firstBytes.put(contents, Files.readAllBytes(file));
             }
         }
+    }
+
+    /** How many forces of files there were until now. */
+    public int forces() {
+        return forces.get();
     }
 
     /** How many operations there were until now. */
@@ -98,7 +118,7 @@ public final class PowerCutDisk implements FileLayer {
         Map<Contents, byte[]> bytes = new HashMap<>(firstBytes);
         for (int i = 0; i < after; i++) {
             if (steps.get(i) instanceof Step.Written written) {
-                boolean sure = forcedLater(i, after, written.contents());
+                boolean sure = forcedNext(i, after, written.contents());
                 byte[] stays = sure ? written.bytes() : unsure(written.bytes(), fate, random);
                 if (stays.length > 0) {
                     bytes.putIfAbsent(written.contents(), new byte[0]);
@@ -111,9 +131,12 @@ public final class PowerCutDisk implements FileLayer {
         return bytes;
     }
 
-    private boolean forcedLater(int from, int after, Contents contents) {
+    /** Whether the first force after a step succeeded; a later one does not make up for one that failed. */
+    private boolean forcedNext(int from, int after, Contents contents) {
         return steps.subList(from, after).stream()
-                .anyMatch(step -> step instanceof Step.Forced forced && forced.contents() == contents);
+                .filter(step -> step instanceof Step.Forced forced && forced.contents() == contents
+                        || step instanceof Step.ForceFailed failed && failed.contents() == contents)
+                .findFirst().filter(step -> step instanceof Step.Forced).isPresent();
     }
 
     private static byte[] put(byte[] old, long at, byte[] more) {
@@ -262,6 +285,10 @@ public final class PowerCutDisk implements FileLayer {
 
         @Override
         public void force() throws IOException {
+            if (failing.test(forces.incrementAndGet())) {
+                add(new Step.ForceFailed(contents));
+                throw new IOException("Input/output error");
+            }
             output.force();
             add(new Step.Forced(contents));
         }

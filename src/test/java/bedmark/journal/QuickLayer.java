@@ -3,7 +3,9 @@ package bedmark.journal;
 import java.io.Closeable;
 import java.io.IOException;
 import java.nio.ByteBuffer;
+import java.nio.channels.FileChannel;
 import java.nio.file.Path;
+import java.nio.file.StandardOpenOption;
 import java.util.List;
 import java.util.Optional;
 
@@ -43,7 +45,9 @@ public final class QuickLayer implements FileLayer {
 
     @Override
     public void truncate(Path file, long length) throws IOException {
-        disk.truncate(file, length);
+        try (FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE)) {
+            channel.truncate(length);
+        }
     }
 
     @Override

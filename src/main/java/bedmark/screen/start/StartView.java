@@ -9,7 +9,6 @@ import bedmark.screen.Screen;
 import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
-import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
 import bedmark.screen.round.RoundModel;
 import bedmark.screen.theme.Icon;

@@ -132,7 +132,8 @@ final class RowView extends VBox {
             update(slot, boxes.get(slot.where()));
         }
         boolean here = row.slots().stream().anyMatch(slot -> slot.equals(model.active()));
-        Optional<ZoneModel.Note> note = here ? model.noteProperty().get() : Optional.empty();
+        Optional<ZoneModel.Note> note = here ? model.noteProperty().get()
+                : row.slots().stream().flatMap(slot -> model.impossible(slot).stream()).findFirst();
         message.setText(note.map(this::sentence).orElse(""));
         boolean wrong = note.filter(RowView::isWrong).isPresent();
         message.getStyleClass().setAll("message", wrong ? "wrong" : "questioned");
@@ -175,10 +176,7 @@ final class RowView extends VBox {
     }
 
     private Judgement judged(Slot slot, boolean active) {
-        if (!active) {
-            return Judgement.NONE;
-        }
-        return model.noteProperty().get().map(note -> isWrong(note) ? Judgement.WRONG : Judgement.QUESTIONED)
+        return (active ? model.noteProperty().get() : model.impossible(slot)).map(note -> isWrong(note) ? Judgement.WRONG : Judgement.QUESTIONED)
                 .orElse(Judgement.NONE);
     }
 

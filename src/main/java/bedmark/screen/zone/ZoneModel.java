@@ -494,6 +494,11 @@ public final class ZoneModel {
         }
     }
 
+    /** What is impossible about the answer of a cell, active or not: it stands until it is mended. */
+    public Optional<Note> impossible(Slot slot) {
+        return firstJudgement(slot).filter(note -> !isDoubt(note));
+    }
+
     /** What there is to say about the answer of a cell, as it is saved: an impossibility before a doubt. */
     private Optional<Note> firstJudgement(Slot slot) {
         return slot.field().judge(document(), setting.last().orElse(Branch.EMPTY)).stream()

@@ -4,11 +4,11 @@ import static bedmark.command.BedmarkCommand.in;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.json.JsonReader;
 import bedmark.pack.PackLimits;
 import bedmark.pack.PackReader;
-import bedmark.pack.Progress;
 import bedmark.survey.Bundle;
 import java.io.IOException;
 import java.io.InputStream;

@@ -1,7 +1,9 @@
 package bedmark.command;
 
 import static bedmark.command.BedmarkCommand.in;
+import static bedmark.document.Refused.below;
 
+import bedmark.document.Pointer;
 import bedmark.engine.verdict.Level;
 import bedmark.json.AssessmentWriter;
 import bedmark.json.JsonWriter;
@@ -9,11 +11,14 @@ import bedmark.quantity.UnitSystem;
 import bedmark.survey.Assessor;
 import bedmark.survey.Assessor.Assessed;
 import bedmark.survey.Bundle;
+import bedmark.survey.Survey;
 import bedmark.wording.Wording;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
+import java.util.UUID;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.ArgGroup;
 import picocli.CommandLine.Command;
@@ -53,8 +58,17 @@ final class AssessCommand implements Callable<Integer> {
         private boolean csv;
     }
 
-    /** The surveys of one bundle with their assessments. */
-    record Judged(Bundle bundle, List<Assessed> surveys) {
+    /**
+     * The surveys of one bundle with their assessments.
+     *
+     * @param superseded the surveys that a later revision in the bundle replaces; they are judged all the same
+     */
+    record Judged(Bundle bundle, List<Assessed> surveys, Set<UUID> superseded) {
+
+        static Judged of(Bundle bundle) {
+            Assessor assessor = below(Pointer.of("plant"), () -> new Assessor(bundle.register()));
+            return new Judged(bundle, assessor.assess(bundle.surveys()), Survey.superseded(bundle.surveys()));
+        }
     }
 
     AssessCommand(Surroundings surroundings) {
@@ -76,8 +90,7 @@ final class AssessCommand implements Callable<Integer> {
     private int assess(Path from, UnitSystem system) throws Exception {
         List<Judged> judged = new ArrayList<>();
         for (BundleSource.Named named : BundleSource.read(from)) {
-            judged.add(in(named.file(), () -> new Judged(named.bundle(),
-                    new Assessor(named.bundle().register()).assess(named.bundle().surveys()))));
+            judged.add(in(named.file(), () -> named.judge(Judged::of)));
         }
         List<Assessed> all = judged.stream().flatMap(one -> one.surveys().stream()).toList();
         Wording wording = new Wording(surroundings.words(), system);

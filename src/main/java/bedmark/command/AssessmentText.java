@@ -28,32 +28,39 @@ final class AssessmentText {
     void print(List<Judged> judged, String notice, PrintWriter out) {
         for (Judged one : judged) {
             Register register = one.bundle().register();
-            out.println(wording.text("command.assess.head", register.name(), one.surveys().size()));
+            line(out, wording.text("command.assess.head", register.name(), one.surveys().size()));
             for (Assessed assessed : one.surveys()) {
                 out.println();
-                print(assessed, register, one.bundle().forms(), out);
+                print(assessed, one, out);
             }
             out.println();
         }
         out.println(notice);
     }
 
-    private void print(Assessed assessed, Register register, List<Branch> forms, PrintWriter out) {
+    /** What a bundle brought along never commands the terminal. */
+    private static void line(PrintWriter out, String text) {
+        out.println(Wording.plain(text));
+    }
+
+    private void print(Assessed assessed, Judged judged, PrintWriter out) {
         Survey survey = assessed.survey();
+        Register register = judged.bundle().register();
         Register.Transfer transfer = register.transfer(survey.transfer()).orElseThrow();
-        out.println(title(survey, transfer, register));
+        line(out, title(survey, transfer, register)
+                + (judged.superseded().contains(survey.id()) ? wording.text("command.assess.superseded") : ""));
         if (survey.inspectionStatus() != InspectionStatus.INSPECTED) {
-            out.println("  " + wording.text("command.assess.status." + survey.inspectionStatus().code(),
+            line(out, "  " + wording.text("command.assess.status." + survey.inspectionStatus().code(),
                     survey.document().text("statusReason").orElse("")));
             return;
         }
-        Told told = new Telling(wording, form(survey, forms)).tell(assessed.assessment());
-        out.println("  " + told.sentence() + told.sure().map(sure -> " (" + sure + ")").orElse(""));
-        told.figures().forEach(figure -> out.println("    " + figure.label() + ": " + figure.number() + " "
+        Told told = new Telling(wording, form(survey, judged.bundle().forms())).tell(assessed.assessment());
+        line(out, "  " + told.sentence() + told.sure().map(sure -> " (" + sure + ")").orElse(""));
+        told.figures().forEach(figure -> line(out, "    " + figure.label() + ": " + figure.number() + " "
                 + figure.rest()));
-        told.atDesign().ifPresent(line -> out.println("  " + line));
-        told.action().ifPresent(line -> out.println("  " + line));
-        told.repeat().ifPresent(line -> out.println("  " + line));
+        told.atDesign().ifPresent(line -> line(out, "  " + line));
+        told.action().ifPresent(line -> line(out, "  " + line));
+        told.repeat().ifPresent(line -> line(out, "  " + line));
     }
 
     private String title(Survey survey, Register.Transfer transfer, Register register) {

@@ -2,6 +2,7 @@ package bedmark.command;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.wording.Wording;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
@@ -66,18 +67,31 @@ public final class BedmarkCommand implements Callable<Integer> {
     }
 
     private static String sentence(Surroundings surroundings, Exception failure) {
+        if (failure instanceof Misread misread) {
+            return Wording.plain(misread.file.toString()) + ": " + sentence(surroundings, misread.refused);
+        }
         return surroundings.wording().sentence(failure instanceof Refused refused ? refused.defect()
                 : Defect.in("", "program-failed", failure.getClass().getSimpleName()));
     }
 
-    /** The same refusal with the file that it is about before its place. */
+    /** A refusal, and the file that it is about. */
+    private static final class Misread extends RuntimeException {
+        private final transient Path file;
+        private final transient Refused refused;
+
+        Misread(Path file, Refused refused) {
+            super(file.toString(), refused);
+            this.file = file;
+            this.refused = refused;
+        }
+    }
+
+    /** Reads something of a file, so that a refusal names it. */
     static <T> T in(Path file, Callable<T> reading) throws Exception {
         try {
             return reading.call();
         } catch (Refused e) {
-            Defect defect = e.defect();
-            throw new Refused(new Defect(defect.code(), file + (defect.where().isEmpty() ? "" : " " + defect.where()),
-                    defect.details()), e);
+            throw new Misread(file, e);
         }
     }
 }

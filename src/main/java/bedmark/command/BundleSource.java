@@ -4,10 +4,11 @@ import static bedmark.command.BedmarkCommand.in;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
+import bedmark.json.JsonReader;
 import bedmark.pack.PackLimits;
 import bedmark.pack.PackReader;
-import bedmark.pack.Progress;
 import bedmark.survey.Bundle;
 import java.io.IOException;
 import java.io.InputStream;
@@ -15,6 +16,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Function;
+import java.util.function.UnaryOperator;
 import java.util.stream.Stream;
 
 /** Bundles from wherever a person points: a bundle, a pack, an unpacked pack, or a folder of bundles and packs. */
@@ -24,8 +27,21 @@ final class BundleSource {
     private BundleSource() {
     }
 
-    /** A bundle and the file that it came from. */
-    record Named(Path file, Bundle bundle) {
+    /**
+     * A bundle and the file that it came from.
+     *
+     * @param placing adds line and column to a defect of the bundle, where the file is its text
+     */
+    record Named(Path file, Bundle bundle, UnaryOperator<Defect> placing) {
+
+        /** Judges the bundle, so that a refusal names the place in the file. */
+        <T> T judge(Function<Bundle, T> judging) {
+            try {
+                return judging.apply(bundle);
+            } catch (Refused e) {
+                throw new Refused(placing.apply(e.defect()), e);
+            }
+        }
     }
 
     /**
@@ -64,10 +80,12 @@ final class BundleSource {
         InputFile.requireFile(file);
         if (isArchive(file)) {
             return in(file, () -> new Named(file,
-                    new PackReader(PackLimits.STANDARD, BundleReader::read).open(file, Progress.NONE).bundle()));
+                    new PackReader(PackLimits.STANDARD, BundleReader::read).open(file, Progress.NONE).bundle(),
+                            UnaryOperator.identity()));
         }
         byte[] bytes = InputFile.read(file);
-        return in(file, () -> new Named(file, BundleReader.read(bytes)));
+        return in(file, () -> new Named(file, BundleReader.read(bytes),
+                defect -> JsonReader.read(bytes).placed(defect)));
     }
 
     /** Told by its first bytes, since a pack keeps its kind when its name is changed. */

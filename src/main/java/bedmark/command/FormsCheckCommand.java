@@ -1,9 +1,6 @@
 package bedmark.command;
 
-import bedmark.document.Defect;
-import bedmark.document.Refused;
 import bedmark.json.FormsChecker;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
@@ -26,9 +23,7 @@ final class FormsCheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        if (!Files.isDirectory(folder)) {
-            throw new Refused(Defect.in(folder.toString(), "folder-absent"));
-        }
+        InputFile.requireFolder(folder);
         return report(FormsChecker.check(folder));
     }
 

@@ -24,6 +24,13 @@ final class InputFile {
         }
     }
 
+    /** Refuses what is no folder, in words. */
+    static void requireFolder(Path folder) {
+        if (!Files.isDirectory(folder)) {
+            throw new Refused(Defect.in(folder.toString(), "folder-absent"));
+        }
+    }
+
     /** The bytes of a file; refused in words where it is not there, no file, or not readable. */
     static byte[] read(Path file) {
         requireFile(file);

@@ -6,6 +6,7 @@ import bedmark.pack.PackWriter;
 import bedmark.pack.PhotoSource;
 import bedmark.pack.WrittenPack;
 import bedmark.survey.Bundle;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -40,7 +41,12 @@ final class PackMakeCommand implements Callable<Integer> {
     public Integer call() throws Exception {
         byte[] text = InputFile.read(bundle);
         Bundle read = BedmarkCommand.in(bundle, () -> BundleReader.read(text));
-        DeviceKey key = DeviceKey.of(store.orElseGet(OpenCommand::ownStore));
+        InputFile.requireFolder(photos);
+        Path keys = store.orElseGet(OpenCommand::ownStore);
+        if (Files.exists(keys)) {
+            InputFile.requireFolder(keys);
+        }
+        DeviceKey key = DeviceKey.of(keys);
         WrittenPack written;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             written = PackWriter.write(read, PhotoSource.folder(photos), key, out, progress::at);

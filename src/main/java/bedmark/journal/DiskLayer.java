@@ -9,9 +9,12 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
+import java.nio.file.attribute.FileAttribute;
+import java.nio.file.attribute.PosixFilePermissions;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Stream;
 
 /** The real disk. */
@@ -54,6 +57,16 @@ final class DiskLayer implements FileLayer {
     @Override
     public Output create(Path file) throws IOException {
         return new DiskOutput(FileChannel.open(file, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE));
+    }
+
+    @Override
+    public Output createPrivate(Path file) throws IOException {
+        boolean posix = file.getFileSystem().supportedFileAttributeViews().contains("posix");
+        FileAttribute<?>[] rights = posix ? new FileAttribute<?>[] {
+            PosixFilePermissions.asFileAttribute(PosixFilePermissions.fromString("rw-------"))
+        } : new FileAttribute<?>[0];
+        return new DiskOutput(FileChannel.open(file,
+                Set.of(StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE), rights));
     }
 
     @Override

@@ -2,6 +2,7 @@ package bedmark.journal;
 
 import java.io.Closeable;
 import java.io.IOException;
+import java.io.OutputStream;
 import java.nio.ByteBuffer;
 import java.nio.file.Path;
 import java.util.List;
@@ -29,6 +30,26 @@ public interface FileLayer {
 
         /** The length in bytes. */
         long size() throws IOException;
+
+        /** What writes to this file, a buffer for each call; closing it closes the file. */
+        default OutputStream stream() {
+            return new OutputStream() {
+                @Override
+                public void write(int single) throws IOException {
+                    Output.this.write(ByteBuffer.wrap(new byte[] {(byte) single}));
+                }
+
+                @Override
+                public void write(byte[] bytes, int from, int length) throws IOException {
+                    Output.this.write(ByteBuffer.wrap(bytes, from, length));
+                }
+
+                @Override
+                public void close() throws IOException {
+                    Output.this.close();
+                }
+            };
+        }
     }
 
     /** A file that is read at any place, by any thread; an interrupted thread does not close it. */
@@ -57,6 +78,9 @@ public interface FileLayer {
 
     /** Makes a new, empty file; fails where one of that name is there. */
     Output create(Path file) throws IOException;
+
+    /** The same, but nobody other than the file's owner may read it, where the system knows such rights. */
+    Output createPrivate(Path file) throws IOException;
 
     /** Opens an existing file to write on at its end. */
     Output append(Path file) throws IOException;

@@ -1,10 +1,10 @@
 package bedmark.journal;
 
-/** Told how far long work has come. */
+/** Hears how far long work has come, and may stop it where it can be. Called often, on the thread that works. */
 @FunctionalInterface
 public interface Progress {
 
-    /** Tells nobody. */
+    /** Nobody listens and nobody stops the work. */
     Progress NONE = (done, total) -> { };
 
     /**
@@ -12,4 +12,9 @@ public interface Progress {
      * @param total the whole work in the same measure (bytes, entries)
      */
     void at(long done, long total);
+
+    /** Whether work that can be stopped is to stop as soon as it can, leaving nothing behind. */
+    default boolean cancelled() {
+        return false;
+    }
 }

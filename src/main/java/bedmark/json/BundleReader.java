@@ -11,8 +11,11 @@ import bedmark.survey.Round;
 import bedmark.survey.Survey;
 import java.math.BigDecimal;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.UUID;
 
 /**
  * Reads bundles: strict JSON, the published schema, then what no schema tells (ids that must exist, stations within
@@ -51,11 +54,13 @@ public final class BundleReader {
 
     /** Before anything else: another kind of file, or a later version, is not measured by this version's schema. */
     private static void requireFormat(Branch root) {
-        String format = root.text("format").orElse("");
+        String format = root.text("format").orElseThrow(() ->
+                new Refused(Defect.at(Pointer.ROOT, "key-absent", "format")));
         if (!Bundle.FORMAT.equals(format)) {
             throw new Refused(Defect.at(Pointer.of("format"), "format-unknown", format, Bundle.FORMAT));
         }
-        BigDecimal version = root.number("version").orElse(BigDecimal.ZERO);
+        BigDecimal version = root.number("version").orElseThrow(() ->
+                new Refused(Defect.at(Pointer.ROOT, "key-absent", "version")));
         if (version.compareTo(BigDecimal.valueOf(Bundle.VERSION)) != 0) {
             throw new Refused(Defect.at(Pointer.of("version"), "version-unknown", version.toPlainString(),
                     Integer.toString(Bundle.VERSION)));
@@ -75,7 +80,10 @@ public final class BundleReader {
             }
         }
         List<Survey> surveys = bundle.surveys();
+        Map<UUID, Integer> revisions = new HashMap<>();
+        surveys.forEach(survey -> revisions.put(survey.id(), survey.revision()));
         for (int i = 0; i < surveys.size(); i++) {
+            checkOrder(surveys.get(i), Pointer.of("surveys").child(i), revisions);
             Pointer where = Pointer.of("surveys").child(i).child("readings");
             try {
                 checkStations(surveys.get(i).readings());
@@ -83,6 +91,14 @@ public final class BundleReader {
                 throw new Refused(e.defect().below(where), e);
             }
         }
+    }
+
+    /** Revisions that replace each other in a ring would leave none that counts. */
+    private static void checkOrder(Survey survey, Pointer where, Map<UUID, Integer> revisions) {
+        survey.supersedes().filter(older -> revisions.getOrDefault(older, 0) >= survey.revision()).ifPresent(older -> {
+            throw new Refused(Defect.at(where.child("supersedes"), "revision-order-wrong", older.toString(),
+                    Integer.toString(survey.revision())));
+        });
     }
 
     private static void checkStations(Branch readings) {

@@ -49,7 +49,8 @@ public final class EntryCodec {
         } else if (act instanceof Act.PhotoAttached attached) {
             return branch.with("photo", attached.photo());
         } else if (act instanceof Act.SurveyCompleted completed) {
-            return branch.with("signedOffBy", completed.signedOffBy());
+            Branch signed = branch.with("signedOffBy", completed.signedOffBy());
+            return completed.completedAt().map(at -> signed.with("completedAt", Node.time(at))).orElse(signed);
         } else if (act instanceof Act.SurveysQueued queued) {
             return branch.with("surveys", ids(queued.surveys()));
         } else if (act instanceof Act.PackExported exported) {
@@ -86,7 +87,8 @@ public final class EntryCodec {
                     branch.get("answer"));
             case "answer-undone" -> new Act.AnswerUndone(uuid(branch, "survey"), number(branch, "undone"));
             case "photo-attached" -> new Act.PhotoAttached(uuid(branch, "survey"), branch(branch, "photo"));
-            case "survey-completed" -> new Act.SurveyCompleted(uuid(branch, "survey"), text(branch, "signedOffBy"));
+            case "survey-completed" -> new Act.SurveyCompleted(uuid(branch, "survey"), text(branch, "signedOffBy"),
+                    branch.time("completedAt"));
             case "surveys-queued" -> new Act.SurveysQueued(ids(branch));
             case "pack-exported" -> new Act.PackExported(ids(branch), text(branch, "pack"), text(branch, "sha256"),
                     text(branch, "folder"));

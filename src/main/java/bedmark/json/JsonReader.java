@@ -12,6 +12,8 @@ import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.core.StreamReadConstraints;
 import com.fasterxml.jackson.core.StreamReadFeature;
+import com.fasterxml.jackson.core.exc.StreamConstraintsException;
+import com.fasterxml.jackson.core.io.JsonEOFException;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.math.BigDecimal;
@@ -33,9 +35,7 @@ public final class JsonReader {
     private static final int DEEPEST = 64;
     private static final int LONGEST_NUMBER = 100;
     private static final int LARGEST_EXPONENT = 100;
-    private static final String OUT_OF_SIZE = "a number is too large or too small: ";
     private static final JsonFactory FACTORY = JsonFactory.builder()
-            .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
             .disable(StreamReadFeature.INCLUDE_SOURCE_IN_LOCATION)
             .streamReadConstraints(StreamReadConstraints.builder()
                     .maxNestingDepth(DEEPEST).maxNumberLength(LONGEST_NUMBER).maxStringLength(10_000_000).build())
@@ -52,16 +52,26 @@ public final class JsonReader {
      * Reads one object.
      *
      * @param bytes UTF-8, with or without a byte-order mark
-     * @throws Refused {@code json-unreadable} with line, column and what the parser met; {@code json-not-utf8}
+     * @throws Refused {@code json-unreadable} with line, column, the code of what is wrong there, and the key or number
+     *                 that it is about; {@code json-not-utf8}
      */
     public static Document read(byte[] bytes) {
         String text = decode(bytes);
         try (JsonParser parser = FACTORY.createParser(text)) {
-            return new JsonReader(parser).document();
-        } catch (JsonProcessingException e) {
-            throw new Refused(unreadable(e.getLocation(), e.getOriginalMessage()), e);
+            return read(new JsonReader(parser));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
+        }
+    }
+
+    private static Document read(JsonReader reader) throws IOException {
+        try {
+            return reader.document();
+        } catch (StreamConstraintsException e) {
+            // It names no place of its own.
+            throw new Refused(unreadable(reader.parser.currentLocation(), "size", ""), e);
+        } catch (JsonProcessingException e) {
+            throw new Refused(unreadable(e.getLocation(), e instanceof JsonEOFException ? "end" : "syntax", ""), e);
         }
     }
 
@@ -78,11 +88,11 @@ public final class JsonReader {
     private Document document() throws IOException {
         JsonToken first = parser.nextToken();
         if (first != JsonToken.START_OBJECT) {
-            throw refused("an object is expected");
+            throw refused("object", "");
         }
         Branch root = (Branch) value(first, Pointer.ROOT);
         if (parser.nextToken() != null) {
-            throw refused("something follows after the end of the object");
+            throw refused("trailing", "");
         }
         return new Document(root, places);
     }
@@ -98,7 +108,7 @@ public final class JsonReader {
             case VALUE_TRUE -> new Node.Flag(true);
             case VALUE_FALSE -> new Node.Flag(false);
             case VALUE_NULL -> new Node.Blank();
-            default -> throw refused("a value is expected");
+            default -> throw refused("syntax", "");
         };
     }
 
@@ -106,6 +116,9 @@ public final class JsonReader {
         Map<String, Node> members = new LinkedHashMap<>();
         while (parser.nextToken() != JsonToken.END_OBJECT) {
             String key = wellFormed(parser.currentName());
+            if (members.containsKey(key)) {
+                throw refused("key-twice", key);
+            }
             members.put(key, value(parser.nextToken(), here.child(key)));
         }
         return new Branch(members);
@@ -126,26 +139,26 @@ public final class JsonReader {
                 return number;
             }
         } catch (NumberFormatException e) {
-            throw new Refused(refused(OUT_OF_SIZE + parser.getText()).defect(), e);
+            throw new Refused(refused("number", parser.getText()).defect(), e);
         }
-        throw refused(OUT_OF_SIZE + parser.getText());
+        throw refused("number", parser.getText());
     }
 
     /** Escapes can smuggle half a surrogate pair into a text, which no file could then hold. */
     private String wellFormed(String text) {
         if (!StandardCharsets.UTF_8.newEncoder().canEncode(text)) {
-            throw refused("half of a surrogate pair stands alone");
+            throw refused("surrogate", "");
         }
         return text;
     }
 
-    private Refused refused(String what) {
-        return new Refused(unreadable(parser.currentLocation(), what));
+    private Refused refused(String what, String about) {
+        return new Refused(unreadable(parser.currentLocation(), what, about));
     }
 
-    private static Defect unreadable(JsonLocation location, String what) {
+    private static Defect unreadable(JsonLocation location, String what, String about) {
         String line = location == null ? "1" : Integer.toString(location.getLineNr());
         String column = location == null ? "1" : Integer.toString(location.getColumnNr());
-        return Defect.in("", "json-unreadable", line, column, what.lines().findFirst().orElse(""));
+        return Defect.in("", "json-unreadable", line, column, what, about);
     }
 }

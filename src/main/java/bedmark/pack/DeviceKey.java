@@ -2,6 +2,7 @@ package bedmark.pack;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.FileLayer;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -44,15 +45,15 @@ public final class DeviceKey {
      * @throws Refused {@code device-key-damaged}, {@code device-key-unreadable}, {@code device-key-not-saved}
      */
     public static DeviceKey of(Path store) {
-        return of(store, new SystemDisk());
+        return of(store, FileLayer.disk());
     }
 
-    static DeviceKey of(Path store, Disk disk) {
+    static DeviceKey of(Path store, FileLayer disk) {
         Path file = store.resolve(FILE);
         return Files.exists(file) ? load(file) : make(file, disk);
     }
 
-    private static DeviceKey make(Path file, Disk disk) {
+    private static DeviceKey make(Path file, FileLayer disk) {
         try {
             KeyPair pair = KeyPairGenerator.getInstance(DeviceIdentity.ALGORITHM).generateKeyPair();
             DeviceKey made = new DeviceKey(pair.getPrivate(), new DeviceIdentity(pair.getPublic()));

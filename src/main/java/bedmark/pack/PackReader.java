@@ -2,6 +2,7 @@ package bedmark.pack;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Progress;
 import bedmark.json.JsonReader;
 import bedmark.survey.Bundle;
 import java.io.IOException;

@@ -2,6 +2,8 @@ package bedmark.pack;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.FileLayer;
+import bedmark.journal.Progress;
 import bedmark.json.JsonWriter;
 import bedmark.survey.Bundle;
 import java.io.IOException;
@@ -42,9 +44,9 @@ import java.util.zip.CRC32;
 public final class PackWriter {
     private static final PackLimits LIMITS = PackLimits.STANDARD;
 
-    private final Disk disk;
+    private final FileLayer disk;
 
-    PackWriter(Disk disk) {
+    PackWriter(FileLayer disk) {
         this.disk = disk;
     }
 
@@ -63,7 +65,7 @@ public final class PackWriter {
      *                 {@code pack-target-folder}, {@code pack-not-saved}), or {@code pack-cancelled}
      */
     public static WrittenPack write(Bundle bundle, PhotoSource photos, DeviceKey key, Path out, Progress progress) {
-        return new PackWriter(new SystemDisk()).writePack(bundle, photos, key, out, progress);
+        return new PackWriter(FileLayer.disk()).writePack(bundle, photos, key, out, progress);
     }
 
     WrittenPack writePack(Bundle bundle, PhotoSource photos, DeviceKey key, Path out, Progress progress) {
@@ -149,7 +151,7 @@ public final class PackWriter {
 
     /** Some systems don't know their free space and say zero; then the writing itself will tell. */
     private void checkRoom(Path folder, long needed) throws IOException {
-        long free = disk.free(folder);
+        long free = disk.usableSpace(folder);
         if (free > 0 && free < needed) {
             throw new Refused(Defect.in(folder.toString(), "pack-disk-full"));
         }

@@ -1,6 +1,8 @@
 package bedmark.pack;
 
+import bedmark.journal.FileLayer;
 import java.io.IOException;
+import java.io.OutputStream;
 import java.nio.file.DirectoryIteratorException;
 import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
@@ -9,11 +11,11 @@ import java.util.UUID;
 
 /** Writes a file so that its name stands for the whole of it or does not stand there at all. */
 final class SafeFile {
-    private final Disk disk;
+    private final FileLayer disk;
     private final Path target;
     private final boolean ownerOnly;
 
-    SafeFile(Disk disk, Path target, boolean ownerOnly) {
+    SafeFile(FileLayer disk, Path target, boolean ownerOnly) {
         this.disk = disk;
         this.target = target.toAbsolutePath();
         this.ownerOnly = ownerOnly;
@@ -21,7 +23,7 @@ final class SafeFile {
 
     /** What fills the file. */
     interface Content {
-        void writeTo(Disk.Output out) throws IOException;
+        void writeTo(OutputStream out) throws IOException;
     }
 
     /**
@@ -33,8 +35,8 @@ final class SafeFile {
         clearLeftovers(folder);
         Path part = folder.resolve(partPrefix() + UUID.randomUUID().toString().substring(0, 8) + ".part");
         try {
-            try (Disk.Output out = disk.create(part, ownerOnly)) {
-                content.writeTo(out);
+            try (FileLayer.Output out = ownerOnly ? disk.createPrivate(part) : disk.create(part)) {
+                content.writeTo(out.stream());
                 out.force();
             }
             disk.move(part, target);

@@ -2,6 +2,7 @@ package bedmark.pack;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Progress;
 
 /** Counts long work and stops it when the person wants that. */
 final class Work {

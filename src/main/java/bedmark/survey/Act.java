@@ -3,6 +3,7 @@ package bedmark.survey;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
+import java.time.OffsetDateTime;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
@@ -191,11 +192,22 @@ public sealed interface Act {
         }
     }
 
-    /** A survey was completed and signed off by the named person. */
-    record SurveyCompleted(UUID survey, String signedOffBy) implements Act {
+    /**
+     * A survey was completed.
+     *
+     * @param signedOffBy the person who signed it off; empty where nobody did
+     * @param completedAt when, where that was before the entry: a survey that was completed elsewhere
+     */
+    record SurveyCompleted(UUID survey, String signedOffBy, Optional<OffsetDateTime> completedAt) implements Act {
         public SurveyCompleted {
             Objects.requireNonNull(survey);
             Objects.requireNonNull(signedOffBy);
+            Objects.requireNonNull(completedAt);
+        }
+
+        /** A survey is completed here and now. */
+        public SurveyCompleted(UUID survey, String signedOffBy) {
+            this(survey, signedOffBy, Optional.empty());
         }
 
         @Override

@@ -4,7 +4,6 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** Takes bundles into a store that has nothing yet, as the acts that do so. */
 public final class Adoption {
@@ -13,11 +12,11 @@ public final class Adoption {
 
     /**
      * The register, its forms and rounds, from the newest bundle that has them; all forms and rounds of the others
-     * that it lacks.
+     * that it lacks; and what else stands in the newest beside them.
      */
     public static Act register(List<Bundle> bundles) {
         Bundle newest = bundles.get(bundles.size() - 1);
-        return new Act.RegisterTaken(Branch.EMPTY
+        return new Act.RegisterTaken(newest.unknown()
                 .with("plant", newest.register().document())
                 .with("forms", series(bundles, "forms"))
                 .with("rounds", series(bundles, "rounds")));
@@ -48,14 +47,14 @@ public final class Adoption {
         List<Act> acts = new ArrayList<>();
         for (Survey survey : bundle.surveys()) {
             Branch document = survey.document().without("assessment");
-            Optional<String> signed = document.text("signedOffBy");
             if (!underWay) {
                 acts.add(new Act.SurveyTaken(survey.id(), document));
                 continue;
             }
             acts.add(new Act.SurveyOpened(survey.id(), document.without("completedAt").without("signedOffBy")));
             if (survey.completedAt().isPresent()) {
-                acts.add(new Act.SurveyCompleted(survey.id(), signed.or(survey::inspector).orElse("")));
+                acts.add(new Act.SurveyCompleted(survey.id(), document.text("signedOffBy").orElse(""),
+                        survey.completedAt()));
             }
         }
         return acts;

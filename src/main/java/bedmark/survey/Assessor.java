@@ -1,7 +1,5 @@
 package bedmark.survey;
 
-import static bedmark.document.Refused.below;
-
 import bedmark.document.Defect;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
@@ -13,7 +11,6 @@ import bedmark.engine.Settings;
 import bedmark.engine.uncertainty.ImpossibleReading;
 import java.util.ArrayList;
 import java.util.Collection;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -53,13 +50,13 @@ public final class Assessor {
      * @throws Refused where a reading cannot be; the place is a pointer within the survey
      */
     public LoadingZone zone(Survey survey) {
-        LoadingZone zone = ZoneMapping.map(survey, register, settings.instruments());
         try {
+            LoadingZone zone = ZoneMapping.map(survey, register, settings.instruments());
             Engine.check(zone);
+            return zone;
         } catch (ImpossibleReading e) {
             throw refused(e);
         }
-        return zone;
     }
 
     /** The material that a survey is judged by. */
@@ -72,11 +69,10 @@ public final class Assessor {
      * Judges all surveys of a bundle.
      *
      * @return one assessment for each survey, in the same order
-     * @throws Refused where a reading cannot be; the place is a pointer within {@code /surveys}
+     * @throws Refused where a number cannot be; the place is a pointer within the bundle
      */
     public List<Assessed> assess(List<Survey> surveys) {
-        Set<UUID> superseded = new HashSet<>();
-        surveys.forEach(survey -> survey.supersedes().ifPresent(superseded::add));
+        Set<UUID> superseded = Survey.superseded(surveys);
         Map<Pointer, List<Survey>> drives = new LinkedHashMap<>();
         for (Survey survey : surveys) {
             if (!superseded.contains(survey.id())) {
@@ -87,8 +83,11 @@ public final class Assessor {
         for (int i = 0; i < surveys.size(); i++) {
             Survey survey = surveys.get(i);
             List<Survey> companions = drives.getOrDefault(drive(survey), List.of());
-            assessed.add(below(Pointer.of("surveys").child(i), () ->
-                    new Assessed(survey, assess(survey, companions))));
+            try {
+                assessed.add(new Assessed(survey, assess(survey, companions)));
+            } catch (Refused e) {
+                throw new Refused(inBundle(e.defect(), survey, Pointer.of("surveys").child(i)), e);
+            }
         }
         return assessed;
     }
@@ -135,7 +134,23 @@ public final class Assessor {
                 register.transfer(survey.transfer()).map(Register.Transfer::conveyor).orElse(""));
     }
 
+    /** What is registered stands with the plant, not with the survey. */
+    private Defect inBundle(Defect defect, Survey survey, Pointer place) {
+        List<String> tokens = Pointer.parse(defect.where()).tokens();
+        Optional<Pointer> registered = tokens.size() < 2 ? Optional.empty() : switch (tokens.get(0)) {
+            case "transfer" -> register.place("transfers", survey.transfer());
+            case "conveyor" -> register.transfer(survey.transfer())
+                    .flatMap(transfer -> register.place("conveyors", transfer.conveyor()));
+            case "material" -> material(survey).flatMap(material -> register.place("materials", material.id()));
+            default -> Optional.empty();
+        };
+        return registered.map(base -> Defect.in(Pointer.of("plant") + base.toString()
+                        + new Pointer(tokens.subList(1, tokens.size())), defect.code(),
+                        defect.details().toArray(String[]::new)))
+                .orElseGet(() -> defect.below(place));
+    }
+
     private static Refused refused(ImpossibleReading e) {
-        return new Refused(Defect.in(e.readingName(), e.code(), e.arguments().toArray(String[]::new)), e);
+        return new Refused(Defect.in(e.readingName(), e.code(), ImpossibleNumber.details(e)), e);
     }
 }

@@ -20,6 +20,8 @@ public record Bundle(Branch document) {
     public static final String FORMAT = "bedmark.bundle";
     /** The version that this program writes. */
     public static final int VERSION = 1;
+    private static final List<String> KEYS = List.of("format", "version", "id", "createdAt", "device", "plant",
+            "forms", "rounds", "notice", "surveys");
 
     /** Refuses what is no bundle of a known version, or holds a survey twice or of an unknown transfer point. */
     public Bundle {
@@ -57,14 +59,15 @@ public record Bundle(Branch document) {
     /**
      * Makes a bundle.
      *
-     * @param register {@code plant}, {@code forms} and {@code rounds} of the store
+     * @param register {@code plant}, {@code forms} and {@code rounds} of the store, and what a later version put
+     *                 beside them
      * @param notice   the caution in one sentence
      * @param surveys  the surveys with their assessments
      */
     public static Bundle of(UUID id, OffsetDateTime createdAt, Branch device, Branch register, String notice,
                             List<Branch> surveys) {
         List<Node> items = new ArrayList<>(surveys);
-        return new Bundle(Branch.EMPTY
+        Branch own = Branch.EMPTY
                 .with("format", FORMAT)
                 .with("version", Node.number(VERSION))
                 .with("id", id.toString())
@@ -74,7 +77,18 @@ public record Bundle(Branch document) {
                 .with("forms", new Node.Series(register.series("forms")))
                 .with("rounds", new Node.Series(register.series("rounds")))
                 .with("notice", notice)
-                .with("surveys", new Node.Series(items)));
+                .with("surveys", new Node.Series(items));
+        return new Bundle(unknown(register).members().entrySet().stream()
+                .reduce(own, (made, member) -> made.with(member.getKey(), member.getValue()), (one, other) -> other));
+    }
+
+    /** What stands in the bundle beside the keys that this version knows. */
+    Branch unknown() {
+        return unknown(document);
+    }
+
+    private static Branch unknown(Branch document) {
+        return KEYS.stream().reduce(document, Branch::without, (one, other) -> other);
     }
 
     public Register register() {

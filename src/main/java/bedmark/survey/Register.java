@@ -12,6 +12,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
+import java.util.stream.IntStream;
 
 /**
  * The plant's register: areas, materials, conveyors and transfer points, as typed views over the plant's document.
@@ -61,6 +62,17 @@ public final class Register {
     /** The whole document. */
     public Branch document() {
         return plant;
+    }
+
+    /**
+     * Where a thing stands in the document.
+     *
+     * @param list {@code materials}, {@code conveyors} or {@code transfers}
+     */
+    Optional<Pointer> place(String list, String id) {
+        List<Branch> items = plant.branches(list);
+        return IntStream.range(0, items.size()).filter(i -> items.get(i).text("id").equals(Optional.of(id)))
+                .mapToObj(i -> Pointer.of(list).child(i)).findFirst();
     }
 
     public String name() {

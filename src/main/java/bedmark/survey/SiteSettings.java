@@ -18,6 +18,7 @@ import bedmark.engine.verdict.Certainty;
 import bedmark.engine.verdict.Limit;
 import bedmark.engine.verdict.Limits;
 import bedmark.engine.verdict.Rule;
+import bedmark.engine.verdict.Sense;
 import bedmark.quantity.Quantity;
 import java.math.BigDecimal;
 import java.util.List;
@@ -69,6 +70,10 @@ final class SiteSettings {
             Limit known = rule.limit();
             OptionalDouble near = below(place, () -> number(row, "near", known.near()));
             OptionalDouble overloaded = below(place, () -> number(row, "overloaded", known.overloaded()));
+            if (rule.sense() == Sense.OVER && overloaded.isPresent() && near.orElse(0) > overloaded.getAsDouble()) {
+                throw new Refused(Defect.at(place.child("near"), "limit-order-wrong",
+                        Double.toString(near.getAsDouble()), Double.toString(overloaded.getAsDouble())));
+            }
             boolean moved = !near.equals(known.near()) || !overloaded.equals(known.overloaded());
             Limit limit = moved ? Limit.ofSite(near, overloaded) : known;
             boolean enabled = below(place, () -> row.flag("enabled")).orElse(true);

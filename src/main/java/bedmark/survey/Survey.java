@@ -9,7 +9,9 @@ import java.math.BigDecimal;
 import java.time.OffsetDateTime;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.UUID;
+import java.util.stream.Collectors;
 
 /**
  * One survey of one transfer point: a typed view over its document (see the data page), which keeps every key that
@@ -51,6 +53,11 @@ public record Survey(Branch document) {
     /** Counts corrections from 1. */
     public int revision() {
         return document.number("revision").map(BigDecimal::intValueExact).orElse(1);
+    }
+
+    /** The surveys that later revisions among them replace. */
+    public static Set<UUID> superseded(List<Survey> surveys) {
+        return surveys.stream().flatMap(survey -> survey.supersedes().stream()).collect(Collectors.toSet());
     }
 
     /** The survey that this one corrects. */

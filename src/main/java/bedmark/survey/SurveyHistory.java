@@ -37,19 +37,6 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
     }
 
     /**
-     * Folds the entries of one survey.
-     *
-     * @return nothing where no entry opens the survey
-     */
-    public static Optional<SurveyHistory> fold(Iterable<Entry> entries) {
-        Optional<SurveyHistory> history = Optional.empty();
-        for (Entry entry : entries) {
-            history = after(history, entry);
-        }
-        return history;
-    }
-
-    /**
      * The history after one more entry of the same survey.
      *
      * @throws IllegalStateException where the act is impossible in the survey's state
@@ -104,8 +91,10 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
                     state, changes);
         }
         if (act instanceof Act.SurveyCompleted completed) {
-            Branch signed = survey.document().with("completedAt", Node.time(entry.at()))
-                    .with("signedOffBy", completed.signedOffBy());
+            Branch finished = survey.document().with("completedAt",
+                    Node.time(completed.completedAt().orElse(entry.at())));
+            Branch signed = completed.signedOffBy().isBlank() ? finished
+                    : finished.with("signedOffBy", completed.signedOffBy());
             return new SurveyHistory(base, new Survey(signed), state.moveTo(QueueState.COMPLETED), changes);
         }
         if (act instanceof Act.SurveysQueued) {

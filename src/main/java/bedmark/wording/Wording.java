@@ -56,15 +56,23 @@ public record Wording(Words words, UnitSystem units) {
         return QuantityFormat.with(number, Unit.PERCENT, symbol(Unit.PERCENT));
     }
 
-    /** A defect in one sentence. */
+    /** A defect in one sentence; a detail that is a code of its own is put in words ({@code code.detail}). */
     public String sentence(Defect defect) {
         Object[] arguments = new Object[defect.details().size() + 1];
         arguments[0] = defect.where().isEmpty() ? "/" : defect.where();
         for (int i = 0; i < defect.details().size(); i++) {
             arguments[i + 1] = defect.details().get(i);
         }
-        // What the input brought along may hold line ends; a refusal is one line.
-        return text("defect." + defect.code(), arguments).replaceAll("\\R", " ");
+        for (int i = 1; i < arguments.length; i++) {
+            String key = "defect." + defect.code() + "." + arguments[i];
+            arguments[i] = words.has(key) ? text(key, arguments) : arguments[i];
+        }
+        return plain(text("defect." + defect.code(), arguments));
+    }
+
+    /** One line: what an input brought along may hold line ends, and what commands a terminal or turns its text. */
+    public static String plain(String text) {
+        return text.replaceAll("\\R|[\\p{Cntrl}\\u202A-\\u202E\\u2066-\\u2069]", " ");
     }
 
     /** A judgement in one sentence. */

@@ -1,6 +1,5 @@
 package bedmark.journal;
 
-import java.io.Closeable;
 import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.file.Files;
@@ -10,7 +9,6 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Random;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.IntPredicate;
@@ -20,7 +18,7 @@ import java.util.stream.Stream;
  * A real disk that remembers every operation, so that its state after a power cut at any point can be laid out:
  * what was forced is there; what was not is there, gone, torn or zero, in any combination, names as well as bytes.
  */
-public final class PowerCutDisk implements FileLayer {
+public final class PowerCutDisk extends ForwardingLayer {
 
     /** How a power cut treats what was not forced. */
     public enum Fate {
@@ -57,7 +55,6 @@ public final class PowerCutDisk implements FileLayer {
     private static final class Contents {
     }
 
-    private final FileLayer disk = FileLayer.disk();
     private final Path root;
     private final Map<Path, Contents> names = new HashMap<>();
     private final Map<Path, Contents> first = new HashMap<>();
@@ -77,6 +74,7 @@ public final class PowerCutDisk implements FileLayer {
      * @param failing which forces of files fail, counted from 1
      */
     public PowerCutDisk(Path root, IntPredicate failing) throws IOException {
+        super(FileLayer.disk());
         this.root = root;
         this.failing = failing;
         try (Stream<Path> files = Files.walk(root)) {
@@ -186,28 +184,8 @@ public final class PowerCutDisk implements FileLayer {
     }
 
     @Override
-    public void createFolder(Path folder) throws IOException {
-        disk.createFolder(folder);
-    }
-
-    @Override
-    public boolean exists(Path file) {
-        return disk.exists(file);
-    }
-
-    @Override
-    public List<Path> list(Path folder) throws IOException {
-        return disk.list(folder);
-    }
-
-    @Override
-    public Input read(Path file) throws IOException {
-        return disk.read(file);
-    }
-
-    @Override
     public synchronized Output create(Path file) throws IOException {
-        Output output = disk.create(file);
+        Output output = super.create(file);
         Contents contents = new Contents();
         names.put(file, contents);
         add(new Step.Named(file, contents));
@@ -215,21 +193,26 @@ public final class PowerCutDisk implements FileLayer {
     }
 
     @Override
+    public Output createPrivate(Path file) throws IOException {
+        return create(file);
+    }
+
+    @Override
     public synchronized Output append(Path file) throws IOException {
-        Output output = disk.append(file);
+        Output output = super.append(file);
         return new Remembered(output, names.get(file), output.size());
     }
 
     @Override
     public synchronized void truncate(Path file, long length) throws IOException {
-        disk.truncate(file, length);
+        super.truncate(file, length);
         add(new Step.Cut(names.get(file), length));
         add(new Step.Forced(names.get(file)));
     }
 
     @Override
     public synchronized void move(Path from, Path to) throws IOException {
-        disk.move(from, to);
+        super.move(from, to);
         Contents contents = names.remove(from);
         names.put(to, contents);
         add(new Step.Moved(from, to, contents));
@@ -237,39 +220,23 @@ public final class PowerCutDisk implements FileLayer {
 
     @Override
     public synchronized void delete(Path file) throws IOException {
-        disk.delete(file);
+        super.delete(file);
         names.remove(file);
         add(new Step.Deleted(file));
     }
 
     @Override
     public synchronized void forceFolder(Path folder) throws IOException {
-        disk.forceFolder(folder);
+        super.forceFolder(folder);
         add(new Step.FolderForced(folder));
     }
 
-    @Override
-    public long usableSpace(Path folder) throws IOException {
-        return disk.usableSpace(folder);
-    }
-
-    @Override
-    public boolean writable(Path folder) {
-        return disk.writable(folder);
-    }
-
-    @Override
-    public Optional<Closeable> lock(Path file) throws IOException {
-        return disk.lock(file);
-    }
-
-    private final class Remembered implements Output {
-        private final Output output;
+    private final class Remembered extends ForwardingOutput {
         private final Contents contents;
         private long size;
 
         Remembered(Output output, Contents contents, long size) {
-            this.output = output;
+            super(output);
             this.contents = contents;
             this.size = size;
         }
@@ -278,7 +245,7 @@ public final class PowerCutDisk implements FileLayer {
         public void write(ByteBuffer bytes) throws IOException {
             byte[] written = new byte[bytes.remaining()];
             bytes.duplicate().get(written);
-            output.write(bytes);
+            super.write(bytes);
             add(new Step.Written(contents, size, written));
             size += written.length;
         }
@@ -289,18 +256,8 @@ public final class PowerCutDisk implements FileLayer {
                 add(new Step.ForceFailed(contents));
                 throw new IOException("Input/output error");
             }
-            output.force();
+            super.force();
             add(new Step.Forced(contents));
-        }
-
-        @Override
-        public long size() throws IOException {
-            return output.size();
-        }
-
-        @Override
-        public void close() throws IOException {
-            output.close();
         }
     }
 }

@@ -31,7 +31,9 @@ class EntryCodecTest {
                 new Act.AnswerSet(SURVEY, Pointer.parse("/readings/beltSpeed"), Optional.of(SOMETHING)),
                 new Act.AnswerSet(SURVEY, Pointer.parse("/notes"), Optional.empty()),
                 new Act.AnswerUndone(SURVEY, 7), new Act.PhotoAttached(SURVEY, SOMETHING),
-                new Act.SurveyCompleted(SURVEY, "R. Okafor"), new Act.SurveysQueued(List.of(SURVEY, OTHER)),
+                new Act.SurveyCompleted(SURVEY, "R. Okafor"),
+                new Act.SurveyCompleted(SURVEY, "", Optional.of(OffsetDateTime.parse("2026-03-01T08:52:10+01:00"))),
+                new Act.SurveysQueued(List.of(SURVEY, OTHER)),
                 new Act.PackExported(List.of(SURVEY), "a.zip", "00ff", "/somewhere"),
                 new Act.ReceiptNoted(List.of(OTHER), SOMETHING));
     }

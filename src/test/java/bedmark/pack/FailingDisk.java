@@ -1,14 +1,16 @@
 package bedmark.pack;
 
+import bedmark.journal.FileLayer;
+import bedmark.journal.ForwardingLayer;
 import java.io.IOException;
+import java.nio.ByteBuffer;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Supplier;
 
 /** A disk whose nth step fails, and with it, if it is gone for good, every later one but deleting. */
-final class FailingDisk implements Disk {
-    private final Disk real = new SystemDisk();
+final class FailingDisk extends ForwardingLayer {
     private final int failing;
     private final boolean forGood;
     private final Supplier<IOException> failure;
@@ -16,6 +18,7 @@ final class FailingDisk implements Disk {
     long free = 1L << 40;
 
     FailingDisk(int failing, boolean forGood, Supplier<IOException> failure) {
+        super(FileLayer.disk());
         this.failing = failing;
         this.forGood = forGood;
         this.failure = failure;
@@ -29,61 +32,61 @@ final class FailingDisk implements Disk {
     }
 
     @Override
-    public Output create(Path file, boolean ownerOnly) throws IOException {
+    public Output create(Path file) throws IOException {
         step("create");
-        Output out = real.create(file, ownerOnly);
-        return new Output() {
-            @Override
-            public void write(int single) throws IOException {
-                step("write");
-                out.write(single);
-            }
+        return new FailingOutput(super.create(file));
+    }
 
-            /** A failing write still leaves half of the bytes. */
-            @Override
-            public void write(byte[] bytes, int from, int length) throws IOException {
-                try {
-                    step("write");
-                } catch (IOException e) {
-                    out.write(bytes, from, length / 2);
-                    throw e;
-                }
-                out.write(bytes, from, length);
-            }
-
-            @Override
-            void force() throws IOException {
-                step("force");
-                out.force();
-            }
-
-            @Override
-            public void close() throws IOException {
-                out.close();
-                step("close");
-            }
-        };
+    @Override
+    public Output createPrivate(Path file) throws IOException {
+        step("create");
+        return new FailingOutput(super.createPrivate(file));
     }
 
     @Override
     public void move(Path from, Path to) throws IOException {
         step("move");
-        real.move(from, to);
+        super.move(from, to);
     }
 
     @Override
     public void forceFolder(Path folder) throws IOException {
         step("force folder");
-        real.forceFolder(folder);
+        super.forceFolder(folder);
     }
 
     @Override
-    public void delete(Path file) throws IOException {
-        real.delete(file);
-    }
-
-    @Override
-    public long free(Path folder) {
+    public long usableSpace(Path folder) {
         return free;
+    }
+
+    private final class FailingOutput extends ForwardingOutput {
+        FailingOutput(Output output) {
+            super(output);
+        }
+
+        /** A failing write still leaves half of the bytes. */
+        @Override
+        public void write(ByteBuffer bytes) throws IOException {
+            try {
+                step("write");
+            } catch (IOException e) {
+                super.write(bytes.duplicate().limit(bytes.position() + bytes.remaining() / 2));
+                throw e;
+            }
+            super.write(bytes);
+        }
+
+        @Override
+        public void force() throws IOException {
+            step("force");
+            super.force();
+        }
+
+        @Override
+        public void close() throws IOException {
+            super.close();
+            step("close");
+        }
     }
 }

@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
+import bedmark.journal.Progress;
 import bedmark.json.JsonWriter;
 import bedmark.survey.Bundle;
 import java.io.ByteArrayOutputStream;

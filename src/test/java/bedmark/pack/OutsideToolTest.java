@@ -3,6 +3,7 @@ package bedmark.pack;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertNotEquals;
 
+import bedmark.journal.Progress;
 import java.io.File;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;

@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Refused;
+import bedmark.journal.Progress;
 import bedmark.json.JsonWriter;
 import bedmark.survey.Bundle;
 import java.io.ByteArrayOutputStream;

@@ -8,6 +8,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Refused;
+import bedmark.journal.FileLayer;
+import bedmark.journal.Progress;
 import bedmark.survey.Bundle;
 import java.io.IOException;
 import java.io.UncheckedIOException;
@@ -46,11 +48,11 @@ class PackWriterTest {
     }
 
     private void refused(String code, Bundle bundle) throws IOException {
-        refused(code, new SystemDisk(), bundle, out, Progress.NONE);
+        refused(code, FileLayer.disk(), bundle, out, Progress.NONE);
         assertEquals(List.of(), Packs.names(stick));
     }
 
-    private Refused refused(String code, Disk disk, Bundle bundle, Path target, Progress progress) {
+    private Refused refused(String code, FileLayer disk, Bundle bundle, Path target, Progress progress) {
         Refused refused = assertThrows(Refused.class,
                 () -> new PackWriter(disk).writePack(bundle, source, key, target, progress));
         assertEquals(code, refused.defect().code(), refused::getMessage);
@@ -64,7 +66,7 @@ class PackWriterTest {
         byte[] sameSize = BagForge.PHOTO.clone();
         sameSize[sameSize.length - 1] ^= 1;
         refused("pack-photo-differs", Samples.bundle(Map.of("a.png", sameSize)));
-        Refused named = refused("pack-photo-missing", new SystemDisk(),
+        Refused named = refused("pack-photo-missing", FileLayer.disk(),
                 Samples.bundle(Map.of("c.png", BagForge.PHOTO)), out, Progress.NONE);
         assertEquals("c.png", named.defect().where());
     }
@@ -101,7 +103,7 @@ class PackWriterTest {
                 }
             }
         };
-        refused("pack-photo-differs", new SystemDisk(), Samples.bundle(PHOTOS), out, meddling);
+        refused("pack-photo-differs", FileLayer.disk(), Samples.bundle(PHOTOS), out, meddling);
         assertEquals(List.of(), Packs.names(stick));
     }
 
@@ -123,8 +125,8 @@ class PackWriterTest {
     @Test
     void whyTheFolderTakesNoPackIsSaid() throws IOException {
         Bundle bundle = Samples.bundle(PHOTOS);
-        refused("pack-folder-missing", new SystemDisk(), bundle, stick.resolve("gone/round.zip"), Progress.NONE);
-        refused("pack-target-folder", new SystemDisk(), bundle, stick, Progress.NONE);
+        refused("pack-folder-missing", FileLayer.disk(), bundle, stick.resolve("gone/round.zip"), Progress.NONE);
+        refused("pack-target-folder", FileLayer.disk(), bundle, stick, Progress.NONE);
         refused("pack-folder-read-only", new FailingDisk(1, true, () -> new AccessDeniedException(out.toString())),
                 bundle, out, Progress.NONE);
         refused("pack-folder-read-only", new FailingDisk(1, true, () -> new IOException("Read-only file system")),
@@ -151,7 +153,7 @@ class PackWriterTest {
                 }
             }
         };
-        refused("pack-folder-missing", new SystemDisk(), Samples.bundle(PHOTOS), out, pulling);
+        refused("pack-folder-missing", FileLayer.disk(), Samples.bundle(PHOTOS), out, pulling);
     }
 
     /** Each step in turn fails, once and for good; only after the move may the new pack be there, and then whole. */
@@ -208,7 +210,7 @@ class PackWriterTest {
                 Thread.currentThread().interrupt();
             }
         };
-        refused("pack-cancelled", new SystemDisk(), Samples.bundle(PHOTOS), out, interrupting);
+        refused("pack-cancelled", FileLayer.disk(), Samples.bundle(PHOTOS), out, interrupting);
         assertTrue(Thread.interrupted());
         assertEquals(List.of(), Packs.names(stick));
     }

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Refused;
+import bedmark.journal.Progress;
 import bedmark.json.JsonWriter;
 import bedmark.survey.Bundle;
 import java.io.IOException;

@@ -23,7 +23,11 @@ class SurveyHistoryTest {
     private final List<Entry> entries = new ArrayList<>();
 
     private SurveyHistory now() {
-        return SurveyHistory.fold(entries).orElseThrow();
+        Optional<SurveyHistory> history = Optional.empty();
+        for (Entry entry : entries) {
+            history = SurveyHistory.after(history, entry);
+        }
+        return history.orElseThrow();
     }
 
     private void act(Act act) {

@@ -10,15 +10,19 @@ import java.io.IOException;
 import java.io.InputStreamReader;
 import java.io.Reader;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 import java.util.Locale;
 import java.util.Properties;
+import java.util.Set;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
+import org.junit.jupiter.params.provider.MethodSource;
 
 class BundlesTest {
-    private static final Pattern PLACEHOLDER = Pattern.compile("\\{\\d}");
+    private static final Pattern PLACEHOLDER = Pattern.compile("\\{\\d");
 
     private static Properties load(String name) throws IOException {
         Properties properties = new Properties();
@@ -30,8 +34,14 @@ class BundlesTest {
         return properties;
     }
 
+    static Stream<String> bundles() {
+        String[] files = Path.of("src/main/resources/bedmark/words").toFile().list();
+        return Stream.of(files).filter(name -> !name.contains("_"))
+                .map(name -> name.substring(0, name.indexOf('.'))).sorted();
+    }
+
     @ParameterizedTest
-    @ValueSource(strings = {"defect", "entry", "judgement", "unit"})
+    @MethodSource("bundles")
     void bothLanguagesHaveTheSameKeysAndPlaceholders(String bundle) throws IOException {
         Properties english = load(bundle);
         Properties spanish = load(bundle + "_es");
@@ -43,9 +53,9 @@ class BundlesTest {
         }
     }
 
-    private static java.util.Set<String> placeholders(String text) {
+    private static Set<String> placeholders(String text) {
         return PLACEHOLDER.matcher(text).results().map(match -> match.group())
-                .collect(java.util.stream.Collectors.toSet());
+                .collect(Collectors.toSet());
     }
 
     @Test

@@ -38,6 +38,8 @@ import java.util.Set;
 import java.util.UUID;
 import java.util.stream.Stream;
 import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.ReadOnlyBooleanProperty;
+import javafx.beans.property.ReadOnlyBooleanWrapper;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleObjectProperty;
@@ -65,6 +67,7 @@ public final class ZoneModel {
     private final ReadOnlyObjectWrapper<InHand> inHand = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<Outcome> outcome;
     private final ReadOnlyObjectWrapper<Optional<Note>> note = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final ReadOnlyBooleanWrapper undoable = new ReadOnlyBooleanWrapper();
     private final StringProperty typed = new SimpleStringProperty("");
     private final ObjectProperty<UnitSystem> units = new SimpleObjectProperty<>(UnitSystem.METRIC);
     private final ObjectProperty<Locale> locale = new SimpleObjectProperty<>(Locale.ENGLISH);
@@ -114,6 +117,8 @@ public final class ZoneModel {
         this.rows = new ReadOnlyObjectWrapper<>(layOut());
         this.outcome = new ReadOnlyObjectWrapper<>(judge(saved.get()));
         typed.addListener((property, before, now) -> preview());
+        typed.addListener((property, before, now) -> undoableChanged());
+        undoableChanged();
         this.units.addListener((property, before, now) -> unitChanged());
         this.locale.addListener((property, before, now) -> preview());
         activate(firstToAnswer());
@@ -159,6 +164,15 @@ public final class ZoneModel {
 
     public ReadOnlyObjectProperty<Optional<Note>> noteProperty() {
         return note.getReadOnlyProperty();
+    }
+
+    /** Whether there is something that {@link #undo} takes back. */
+    public ReadOnlyBooleanProperty undoableProperty() {
+        return undoable.getReadOnlyProperty();
+    }
+
+    private void undoableChanged() {
+        undoable.set(open() && (!typed.get().isEmpty() || pending > 0 || history.newest().isPresent()));
     }
 
     /** What is typed into the active cell; empty where nothing was typed since it became active. */
@@ -370,12 +384,14 @@ public final class ZoneModel {
 
     private void act(Act act) {
         pending++;
+        undoableChanged();
         setting.scribe().save(setting.person(), act, this::noted);
     }
 
     private void noted(Entry entry) {
         history = SurveyHistory.after(Optional.of(history), entry).orElseThrow();
         pending--;
+        undoableChanged();
         if (pending == 0 && undoWhenSaved) {
             undoWhenSaved = false;
             undo();

@@ -44,7 +44,11 @@ public final class FieldBox extends HBox {
         setFocusTraversable(true);
         Region between = new Region();
         HBox.setHgrow(between, Priority.ALWAYS);
-        HBox row = new HBox(value, unit, between, ghost);
+        Region caret = new Region();
+        caret.getStyleClass().add("caret");
+        caret.visibleProperty().bind(active.and(value.textProperty().isEmpty()));
+        caret.managedProperty().bind(caret.visibleProperty());
+        HBox row = new HBox(caret, value, unit, between, ghost);
         row.getStyleClass().add("row");
         row.setAlignment(Pos.BASELINE_LEFT);
         VBox lines = new VBox(this.name, row);

@@ -129,6 +129,7 @@ public final class QueueView implements Screen {
         model.troubleProperty().get().ifPresent(defect -> {
             Label trouble = wrapped(wording.sentence(defect));
             trouble.getStyleClass().add("trouble-text");
+            trouble.setId("trouble");
             outcome.getChildren().addAll(new SectionHeader(wording.text("screen.queue.failed")), trouble,
                     wrapped(wording.text("screen.queue.still-here")));
         });

@@ -9,7 +9,6 @@ import bedmark.wording.Wording;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import javafx.geometry.Bounds;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
@@ -93,7 +92,7 @@ final class FormPane extends VBox {
         return rows.stream().filter(RowView::holdsActive).findFirst();
     }
 
-    /** Scrolls just so far that the row is in sight; the row before it too, where there is room for both. */
+    /** Brings the row in sight with the one before it where there is room for both; no row is cut at the top. */
     private void reveal(RowView row) {
         applyCss();
         layout();
@@ -102,13 +101,13 @@ final class FormPane extends VBox {
         if (room <= 0 || all <= room) {
             return;
         }
-        Bounds bounds = row.getBoundsInParent();
-        double top = scroll.getVvalue() * (all - room);
-        double wanted = top;
-        if (bounds.getMinY() < top) {
-            wanted = bounds.getMinY();
-        } else if (bounds.getMaxY() > top + room) {
-            wanted = Math.min(bounds.getMinY(), bounds.getMaxY() - room);
+        int index = rows.indexOf(row);
+        double wanted = row.getBoundsInParent().getMinY();
+        if (index > 0 && rows.get(index - 1).row().section().equals(row.row().section())) {
+            double before = rows.get(index - 1).getBoundsInParent().getMinY();
+            if (row.getBoundsInParent().getMaxY() - before <= room + 1) {
+                wanted = before;
+            }
         }
         scroll.setVvalue(Math.max(0, Math.min(1, wanted / (all - room))));
     }

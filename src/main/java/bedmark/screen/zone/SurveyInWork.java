@@ -10,6 +10,8 @@ import bedmark.survey.SurveyHistory;
 import java.util.Optional;
 import java.util.UUID;
 import java.util.function.Consumer;
+import javafx.beans.property.ReadOnlyBooleanProperty;
+import javafx.beans.property.ReadOnlyBooleanWrapper;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 
@@ -22,6 +24,7 @@ final class SurveyInWork {
     private final Scribe scribe;
     private final String person;
     private final ReadOnlyObjectWrapper<Branch> document;
+    private final ReadOnlyBooleanWrapper undoable = new ReadOnlyBooleanWrapper();
     private SurveyHistory history;
     private int onTheWay;
     private Optional<Consumer<Pointer>> undoWanted = Optional.empty();
@@ -32,6 +35,16 @@ final class SurveyInWork {
         this.scribe = scribe;
         this.person = person;
         this.document = new ReadOnlyObjectWrapper<>(history.survey().document());
+        undoableChanged();
+    }
+
+    /** Whether there is a change that can be taken back. */
+    ReadOnlyBooleanProperty undoableProperty() {
+        return undoable.getReadOnlyProperty();
+    }
+
+    private void undoableChanged() {
+        undoable.set(open() && (onTheWay > 0 || history.newest().isPresent()));
     }
 
     /** The survey with all changes, saved or on their way. */
@@ -78,6 +91,7 @@ final class SurveyInWork {
 
     private void save(Act act, Runnable then) {
         onTheWay++;
+        undoableChanged();
         scribe.save(person, act, entry -> saved(entry, then), this::arrived);
     }
 
@@ -89,6 +103,7 @@ final class SurveyInWork {
 
     private void arrived() {
         onTheWay--;
+        undoableChanged();
         if (onTheWay > 0) {
             return;
         }

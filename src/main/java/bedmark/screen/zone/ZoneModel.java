@@ -27,12 +27,14 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
+import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import javafx.beans.value.ObservableValue;
 
 /**
  * A transfer point under survey: which cell is active, what is typed into it, what the survey then says. What is typed
@@ -45,6 +47,7 @@ public final class ZoneModel {
     private final Map<Pointer, Unit> chosenUnits = new HashMap<>();
     private final Set<Pointer> believed = new HashSet<>();
     private final SurveyInWork work;
+    private final BooleanBinding undoable;
     private final ReadOnlyObjectWrapper<Branch> survey;
     private final ReadOnlyObjectWrapper<List<SlotRow>> rows;
     private final ReadOnlyObjectWrapper<InHand> inHand = new ReadOnlyObjectWrapper<>();
@@ -98,6 +101,7 @@ public final class ZoneModel {
         this.outcome = new ReadOnlyObjectWrapper<>(judge(document()));
         work.documentProperty().addListener((property, before, now) -> refresh());
         typed.addListener((property, before, now) -> preview());
+        this.undoable = typed.isNotEmpty().or(work.undoableProperty());
         this.units.addListener((property, before, now) -> unitChanged());
         this.locale.addListener((property, before, now) -> preview());
         activate(firstToAnswer());
@@ -148,6 +152,11 @@ public final class ZoneModel {
 
     public ReadOnlyObjectProperty<Optional<Note>> noteProperty() {
         return note.getReadOnlyProperty();
+    }
+
+    /** Whether there is something that {@link #undo} takes back. */
+    public ObservableValue<Boolean> undoableProperty() {
+        return undoable;
     }
 
     /** What is typed into the active cell; empty where nothing was typed since it became active. */

@@ -4,6 +4,7 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.engine.Assessment;
+import bedmark.engine.verdict.Level;
 import bedmark.form.StationsField;
 import bedmark.picture.Snap;
 import bedmark.picture.ZoneSketch;
@@ -38,6 +39,7 @@ import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.layout.BorderPane;
@@ -184,10 +186,16 @@ public final class ZoneView implements Screen {
         return new FootBar(Optional.of(back), Optional.of(middle), Optional.of(onward));
     }
 
+    /** Puts the focus where the active cell is filled in: into its box, or into the text below it. */
+    private void focusActive() {
+        form.focusActive();
+        entry.focusText();
+    }
+
     /** Completes this survey and goes on, or stays at the first gap. */
     private void onward(Optional<RoundRow> next) {
         if (model.open() && !model.complete(workplace.preferences().person())) {
-            form.focusActive();
+            focusActive();
             return;
         }
         next.ifPresentOrElse(row -> navigator.toZone(round, row), () -> navigator.toRound(round));
@@ -221,6 +229,10 @@ public final class ZoneView implements Screen {
     private Verdict verdict(Assessment found) {
         Told told = new Telling(wording, model.setting().form()).tell(found);
         List<String> advice = new ArrayList<>();
+        if (found.level() == Level.INCOMPLETE && !found.missingRequired().isEmpty()) {
+            advice.add(wording.text("screen.zone.still-to-read", found.missingRequired().stream()
+                    .map(name -> wording.reading(name, model.setting().form())).collect(Collectors.joining(" \u00B7 "))));
+        }
         told.repeat().ifPresent(advice::add);
         told.action().ifPresent(advice::add);
         told.atDesign().ifPresent(advice::add);
@@ -313,12 +325,13 @@ public final class ZoneView implements Screen {
             body.setLeft(work);
             body.setCenter(result);
         }
-        form.focusActive();
+        entry.turned(portrait);
+        focusActive();
     }
 
     @Override
     public void shown() {
-        form.focusActive();
+        focusActive();
     }
 
     @Override

@@ -26,7 +26,7 @@ public record SpeedField(Head head, Direct direct, Timed timed, Pulley pulley) i
     public enum Way {
         /** A quantity, from a tachometer. */
         DIRECT(KEY),
-        /** {@code {beltLength, revolutions, elapsed}}. */
+        /** {@code {beltLength, revolutions, elapsed}}; without a length the conveyor's holds. */
         TIMED("beltTiming"),
         /** {@code {diameter, rotation}}; ignores slip. */
         PULLEY("pulleySpeed");
@@ -86,10 +86,11 @@ public record SpeedField(Head head, Direct direct, Timed timed, Pulley pulley) i
                 .allMatch(key -> at(survey, way.where().child(key)).isPresent()));
     }
 
+    /** What a way can't do without; the length of the belt may be the one that its conveyor is registered with. */
     private static List<String> parts(Way way) {
         return switch (way) {
             case DIRECT -> List.of("value", "unit");
-            case TIMED -> List.of("beltLength", "revolutions", "elapsed");
+            case TIMED -> List.of("revolutions", "elapsed");
             case PULLEY -> List.of("diameter", "rotation");
         };
     }

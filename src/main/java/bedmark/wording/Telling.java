@@ -48,7 +48,8 @@ public final class Telling {
         Optional<Finding> leading = leading(assessment);
         Optional<String> atDesign = assessment.level() == Level.INCOMPLETE ? Optional.empty()
                 : Optional.of(atDesign(assessment));
-        return new Told(sentence(assessment, leading), leading.flatMap(finding -> sure(assessment, finding)), atDesign, figures(assessment), action(assessment, leading),
+        return new Told(sentence(assessment, leading), leading.flatMap(finding -> sure(assessment, finding)),
+                atDesign, figures(assessment), action(assessment, leading),
                 assessment.repeat().map(name -> wording.text("verdict.repeat", wording.reading(name, form))));
     }
 
@@ -106,23 +107,28 @@ public final class Telling {
                 : observed(finding, limit);
     }
 
+    /** Nothing where the verdict rests on what is counted or seen, and not on a reading with an uncertainty. */
     private Optional<String> sure(Assessment assessment, Finding leading) {
         return switch (assessment.level()) {
-            case OVERLOADED -> probability(leading.probabilityOverloaded(), "verdict.sure");
-            case UNDECIDED -> probability(leading.probabilityOverloaded(), "verdict.perhaps-over");
-            case NEAR -> probability(leading.probabilityNear(), "verdict.sure");
-            case WITHIN -> {
-                double over = assessment.findings().stream()
-                        .mapToDouble(finding -> finding.probabilityNear().orElse(0)).max().orElse(0);
-                yield Optional.of(wording.text("verdict.sure", wording.percent(1 - over)));
-            }
+            case OVERLOADED -> probability(leading, leading.probabilityOverloaded(), "verdict.sure");
+            case UNDECIDED -> probability(leading, leading.probabilityOverloaded(), "verdict.perhaps-over");
+            case NEAR -> probability(leading, leading.probabilityNear(), "verdict.sure");
+            case WITHIN -> assessment.findings().stream()
+                    .filter(finding -> isMeasured(finding) && finding.probabilityNear().isPresent())
+                    .max(Comparator.comparingDouble(finding -> finding.probabilityNear().getAsDouble()))
+                    .map(finding -> wording.text("verdict.sure",
+                            wording.probability(1 - finding.probabilityNear().getAsDouble())));
             case INCOMPLETE -> Optional.empty();
         };
     }
 
-    private Optional<String> probability(OptionalDouble probability, String key) {
-        return probability.isPresent()
-                ? Optional.of(wording.text(key, wording.percent(probability.getAsDouble()))) : Optional.empty();
+    private static boolean isMeasured(Finding finding) {
+        return finding.standardUncertainty() > 0;
+    }
+
+    private Optional<String> probability(Finding finding, OptionalDouble probability, String key) {
+        return isMeasured(finding) && probability.isPresent()
+                ? Optional.of(wording.text(key, wording.probability(probability.getAsDouble()))) : Optional.empty();
     }
 
     private String atDesign(Assessment assessment) {

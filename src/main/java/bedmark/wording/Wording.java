@@ -49,10 +49,17 @@ public record Wording(Words words, UnitSystem units) {
         return QuantityFormat.with(format().entered(quantity), quantity.unit(), symbol(quantity.unit()));
     }
 
-    /** A share as a whole percentage, never rounded to a certainty that is none. */
+    /** A share as a whole percentage; a small one is not rounded to nothing. */
     public String percent(double share) {
-        String number = share > 0.99 && share < 1 ? "> 99" : share > 0 && share < 0.01 ? "< 1"
-                : format().computed(share * 100, 0);
+        return percent(share > 0 && share < 0.01 ? "< 1" : format().computed(share * 100, 0));
+    }
+
+    /** A probability as a whole percentage: what was measured is never certain, however far the tail reaches. */
+    public String probability(double probability) {
+        return probability > 0.99 ? percent("> 99") : probability < 0.01 ? percent("< 1") : percent(probability);
+    }
+
+    private String percent(String number) {
         return QuantityFormat.with(number, Unit.PERCENT, symbol(Unit.PERCENT));
     }
 

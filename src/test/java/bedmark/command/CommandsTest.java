@@ -47,7 +47,8 @@ class CommandsTest {
 
     @Test
     void unitsNeverAlterJson() {
-        assertEquals(Terminal.run("assess", BUNDLE, "--json"), Terminal.run("assess", BUNDLE, "--json", "--units", "us"));
+        assertEquals(Terminal.run("assess", BUNDLE, "--json"),
+                Terminal.run("assess", BUNDLE, "--json", "--units", "us"));
     }
 
     @Test
@@ -55,6 +56,29 @@ class CommandsTest {
         assertTrue(Terminal.run("assess", BUNDLE).out().contains("kW"));
         assertTrue(Terminal.run("assess", BUNDLE, "--units", "us").out().contains("hp"));
         assertTrue(Terminal.run("assess", BUNDLE, "--csv", "--units", "us").out().contains("skirtDrag [[lbf_av]]"));
+    }
+
+    @Test
+    void nothingMeasuredIsToldAsCertain() {
+        String told = Terminal.run("assess", "sample-surveys").out().replace('\u00a0', ' ');
+        assertTrue(told.contains("> 99 % sure"), told);
+        assertFalse(told.contains("100 % sure"), told);
+    }
+
+    @Test
+    void whatALaterRevisionReplacesIsMarked() {
+        List<String> marked = Terminal.run("assess", BUNDLE).out().lines()
+                .filter(line -> line.contains("replaced by a later revision")).toList();
+        assertEquals(1, marked.size());
+        assertTrue(marked.get(0).startsWith("CV-1 tail  Jaw crusher > CV-1  [march]"), marked.get(0));
+    }
+
+    @Test
+    void whatWasNotInspectedSaysSoAndWhy() throws Exception {
+        Path bundle = temp.resolve("bundle.json");
+        Files.writeString(bundle, Files.readString(Path.of(BUNDLE)).replace("\"not-accessible\",\n      \"readings\"",
+                "\"not-accessible\", \"statusReason\": \"scaffold\",\n      \"readings\""));
+        assertTrue(Terminal.run("assess", bundle.toString()).out().contains("Not accessible: scaffold"));
     }
 
     @Test
@@ -121,7 +145,8 @@ class CommandsTest {
     @Test
     void impossibleReadingNamesItsPlace() throws Exception {
         Path broken = temp.resolve("broken.json");
-        Files.writeString(broken, Files.readString(Path.of(BUNDLE)).replace("\"unit\": \"kg/m3\"", "\"unit\": \"kg/m2\""));
+        Files.writeString(broken, Files.readString(Path.of(BUNDLE))
+                .replace("\"unit\": \"kg/m3\"", "\"unit\": \"kg/m2\""));
         Result result = Terminal.run("assess", broken.toString());
         assertOneSentence(ExitCode.UNREADABLE, result);
         assertTrue(result.err().contains("/plant/materials/0/bulkDensity"), result.err());

@@ -44,7 +44,8 @@ class ExitCodesTest {
     }
 
     private static Branch json(Path file) {
-        return JsonReader.read(Terminal.run("assess", file.toString(), "--json").out().getBytes(StandardCharsets.UTF_8)).root();
+        String out = Terminal.run("assess", file.toString(), "--json").out();
+        return JsonReader.read(out.getBytes(StandardCharsets.UTF_8)).root();
     }
 
     /** The round with the surveys of some levels alone. */

@@ -27,7 +27,8 @@ class BranchTest {
 
     @Test
     void refusalOfAQuantityNamesTheKeyInside() {
-        Branch branch = Branch.EMPTY.with("beltSpeed", Branch.EMPTY.with("value", Node.number(2)).with("unit", "furlong"));
+        Branch branch = Branch.EMPTY.with("beltSpeed",
+                Branch.EMPTY.with("value", Node.number(2)).with("unit", "furlong"));
         Defect defect = assertThrows(Refused.class, () -> branch.quantity("beltSpeed")).defect();
         assertEquals(Defect.at(Pointer.parse("/beltSpeed/unit"), "unit-unknown", "furlong"), defect);
     }

@@ -50,6 +50,8 @@ class FieldFormTest {
         assertEquals(List.of("beltSpeed"), gaps(form, readings("beltTiming", timing)));
         assertEquals(List.of(), gaps(form, readings("beltTiming",
                 timing.with("elapsed", quantity("99", Unit.SECOND)))));
+        assertEquals(List.of(), gaps(form, readings("beltTiming", timing.without("beltLength")
+                .with("elapsed", quantity("99", Unit.SECOND)))), "the conveyor's belt length holds");
         assertEquals(List.of(), gaps(form, readings("beltSpeed", quantity("2", Unit.METRE_PER_SECOND))));
         assertEquals(List.of("beltSpeed"), gaps(form, readings("pulleySpeed",
                 Branch.EMPTY.with("diameter", quantity("1", Unit.METRE)))));

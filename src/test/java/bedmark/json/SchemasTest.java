@@ -7,12 +7,21 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
+import bedmark.engine.bed.DepthMethod;
+import bedmark.engine.drag.DragMethod;
+import bedmark.engine.seal.SealCondition;
+import bedmark.engine.seal.SealType;
+import bedmark.engine.seal.Side;
+import bedmark.engine.uncertainty.Instrument;
+import bedmark.engine.verdict.Level;
+import bedmark.engine.verdict.Rule;
 import bedmark.form.Group;
 import bedmark.form.ReadingKey;
 import bedmark.form.SealsField;
 import bedmark.form.StationsField;
 import bedmark.quantity.Dimension;
 import bedmark.quantity.Unit;
+import bedmark.survey.InspectionStatus;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
@@ -21,6 +30,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.function.Function;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
@@ -95,6 +105,42 @@ class SchemasTest {
         assertEquals(Set.copyOf(SealsField.TYPES), words("bundle", seals + "type/enum"));
         assertEquals(Set.copyOf(SealsField.CONDITIONS), words("bundle", seals + "condition/enum"));
         assertEquals(Set.copyOf(StationsField.METHODS), words("bundle", "/$defs/depthMethod/enum"));
+    }
+
+    @Test
+    void codesOfTheSchemasAreThoseOfTheEngine() {
+        Set<String> sides = codes(Side.values(), Side::code);
+        Set<String> types = codes(SealType.values(), SealType::code);
+        Set<String> conditions = codes(SealCondition.values(), SealCondition::code);
+        Set<String> drags = codes(DragMethod.values(), DragMethod::code);
+        String seals = "/$defs/readings/properties/seals/items/properties/";
+        assertEquals(sides, words("bundle", seals + "side/enum"));
+        assertEquals(types, words("bundle", seals + "type/enum"));
+        assertEquals(conditions, words("bundle", seals + "condition/enum"));
+        assertEquals(types, words("bundle", "/$defs/sealRate/properties/type/enum"));
+        assertEquals(conditions, words("bundle", "/$defs/sealRate/properties/condition/enum"));
+        assertEquals(codes(DepthMethod.values(), DepthMethod::code), words("bundle", "/$defs/depthMethod/enum"));
+        assertTrue(words("bundle", "/$defs/plant/properties/method/enum").containsAll(drags));
+        assertTrue(words("assessment", "/$defs/assessment/properties/method/enum").containsAll(drags));
+        assertEquals(codes(Stream.of(Instrument.values()).filter(one -> one != Instrument.EXACT)
+                        .toArray(Instrument[]::new), Instrument::code),
+                words("bundle", "/$defs/instrument/properties/kind/enum"));
+        assertEquals(codes(Level.values(), Level::code),
+                words("assessment", "/$defs/assessment/properties/level/enum"));
+        assertEquals(codes(InspectionStatus.values(), InspectionStatus::code),
+                words("bundle", "/$defs/survey/properties/inspectionStatus/enum"));
+    }
+
+    @Test
+    void everyRuleHasItsLimitsInTheBundle() {
+        Branch limits = (Branch) schema("bundle").at(Pointer.parse("/$defs/limits/properties")).orElseThrow();
+        Set<String> others = Set.of("certainty", "beltGrip", "boardGrip");
+        assertEquals(codes(Rule.values(), Rule::code), limits.members().keySet().stream()
+                .filter(key -> !others.contains(key)).collect(Collectors.toSet()));
+    }
+
+    private static <T> Set<String> codes(T[] values, Function<T, String> code) {
+        return Stream.of(values).map(code).collect(Collectors.toSet());
     }
 
     @Test

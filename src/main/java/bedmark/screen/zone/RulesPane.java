@@ -79,7 +79,7 @@ final class RulesPane extends VBox {
         boolean over = finding.level() == Level.OVERLOADED || finding.level() == Level.UNDECIDED;
         OptionalDouble probability = over ? finding.probabilityOverloaded() : finding.probabilityNear();
         return probability.isPresent() ? "\n" + wording.text(over ? "screen.rules.likely-over"
-                : "screen.rules.likely-near", wording.percent(probability.getAsDouble())) : "";
+                : "screen.rules.likely-near", wording.probability(probability.getAsDouble())) : "";
     }
 
     private static Label wrapped(String text) {

@@ -1,5 +1,6 @@
 package bedmark.screen.part;
 
+import java.util.List;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleBooleanProperty;
@@ -24,6 +25,7 @@ public final class FieldBox extends HBox {
     static final PseudoClass QUESTIONED = PseudoClass.getPseudoClass("questioned");
     static final PseudoClass WRONG = PseudoClass.getPseudoClass("wrong");
 
+    private final VBox lines = new VBox();
     private final HBox top = new HBox();
     private final Label name = Labels.label("box-name");
     private final Label value = Labels.label("value");
@@ -56,7 +58,7 @@ public final class FieldBox extends HBox {
         Region beside = new Region();
         HBox.setHgrow(beside, Priority.ALWAYS);
         top.getChildren().addAll(this.name, beside);
-        VBox lines = new VBox(top, row);
+        lines.getChildren().addAll(top, row);
         lines.setAlignment(Pos.CENTER_LEFT);
         HBox.setHgrow(lines, Priority.ALWAYS);
         lines.setMinWidth(0);
@@ -92,9 +94,15 @@ public final class FieldBox extends HBox {
         return this;
     }
 
-    /** Lets the value run over two lines: it is words and no number. */
+    /** Lets the value run over several lines with the ghost below it: it is words and no number. */
     public FieldBox ofWords() {
         getStyleClass().add("words");
+        lines.getChildren().add(ghost);
+        for (Label label : List.of(value, ghost)) {
+            label.setMinHeight(Region.USE_PREF_SIZE);
+        }
+        ghost.setWrapText(true);
+        ghost.managedProperty().bind(ghost.textProperty().isNotEmpty());
         value.setMinWidth(0);
         value.setWrapText(true);
         return this;

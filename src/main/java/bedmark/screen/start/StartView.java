@@ -78,6 +78,7 @@ public final class StartView implements Screen {
             return;
         }
         person.setId("person");
+        person.setAccessibleText(wording.text("screen.start.person"));
         person.setPromptText(wording.text("screen.start.person-prompt"));
         if (!person.textProperty().isBound()) {
             person.setText(model.personProperty().get());

@@ -113,6 +113,7 @@ final class EntryPane extends StackPane {
             pad.close();
             getChildren().setAll(slot instanceof Slot.TextSlot text && !SlotWords.isMaterial(slot)
                     ? textPane(text) : choicePane(slot));
+            focusText();
         }
     }
 

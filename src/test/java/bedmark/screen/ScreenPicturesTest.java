@@ -161,13 +161,11 @@ class ScreenPicturesTest {
         app.click("to-queue");
         takeAll("queue");
         app.click("queue-all");
-        Files.delete(STICK);
-        Files.createFile(STICK);
+        app.exportsTo(Path.of("/media/usb-stick"));
         app.click("export");
         app.until(() -> app.has("trouble"));
         take("export-failed");
-        Files.delete(STICK);
-        Files.createDirectories(STICK);
+        app.exportsTo(STICK);
         app.click("export");
         app.until(() -> app.has("receipt"));
         take("export-receipt");

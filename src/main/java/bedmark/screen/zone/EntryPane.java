@@ -113,6 +113,7 @@ final class EntryPane extends StackPane {
             pad.close();
             getChildren().setAll(slot instanceof Slot.TextSlot text && !SlotWords.isMaterial(slot)
                     ? textPane(text) : choicePane(slot));
+            focusText();
         }
     }
 
@@ -235,11 +236,13 @@ final class EntryPane extends StackPane {
                     });
             button.setId("choice-" + choice.code());
             button.getStyleClass().add("choice");
+            button.setMinWidth(0);
             button.setMaxWidth(Double.MAX_VALUE);
             grid.add(button, i % columns, i / columns);
         }
         ScrollPane scroll = new ScrollPane(grid);
         scroll.setFitToWidth(true);
+        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         scroll.getStyleClass().add("form-scroll");
         VBox.setVgrow(scroll, Priority.ALWAYS);
         VBox pane = new VBox(scroll, moves());

@@ -39,8 +39,22 @@ final class FormPane extends VBox {
         listening.onChange(model.surveyProperty(), survey -> update());
         listening.onChange(model.typedProperty(), typed -> update());
         listening.onChange(model.noteProperty(), note -> update());
-        listening.onChange(model.beltStateProperty(), state -> caution());
+        listening.onChange(model.beltStateProperty(), state -> sayCaution());
         listening.to(model.inHandProperty(), inHand -> activated());
+    }
+
+    /** The caution, for whoever has a better place for it while there is no room here. */
+    CautionStrip caution() {
+        return caution;
+    }
+
+    /** Leaves the head and the caution out where large keys take the room, or takes them in again. */
+    void shrink(boolean small) {
+        if (small) {
+            getChildren().setAll(scroll);
+        } else {
+            getChildren().setAll(header, scroll, caution);
+        }
     }
 
     private void layOut(List<SlotRow> wanted) {
@@ -85,7 +99,7 @@ final class FormPane extends VBox {
             row.focusActive();
             reveal(row);
         });
-        caution();
+        sayCaution();
     }
 
     private Optional<RowView> active() {
@@ -103,7 +117,10 @@ final class FormPane extends VBox {
         }
         int index = rows.indexOf(row);
         double wanted = row.getBoundsInParent().getMinY();
-        if (index > 0 && rows.get(index - 1).row().section().equals(row.row().section())) {
+        if (row.getHeight() > room + 1) {
+            wanted = row.activeBox().map(box -> list.sceneToLocal(box.localToScene(box.getLayoutBounds())).getMinY())
+                    .orElse(wanted);
+        } else if (index > 0 && rows.get(index - 1).row().section().equals(row.row().section())) {
             double before = rows.get(index - 1).getBoundsInParent().getMinY();
             if (row.getBoundsInParent().getMaxY() - before <= room + 1) {
                 wanted = before;
@@ -112,7 +129,7 @@ final class FormPane extends VBox {
         scroll.setVvalue(Math.max(0, Math.min(1, wanted / (all - room))));
     }
 
-    private void caution() {
+    private void sayCaution() {
         String kind = active().flatMap(row -> row.row().field().head().caution())
                 .map(found -> found.code()).orElse("always");
         String state = model.beltStateProperty().get().map(now -> now.running() ? "running" : "isolated")

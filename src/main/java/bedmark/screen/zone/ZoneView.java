@@ -28,6 +28,7 @@ import bedmark.screen.round.RoundModel;
 import bedmark.screen.round.RoundRow;
 import bedmark.screen.round.Ticks;
 import bedmark.screen.theme.Density;
+import bedmark.screen.theme.Hand;
 import bedmark.screen.theme.Icon;
 import bedmark.screen.theme.LevelShape;
 import bedmark.survey.Register;
@@ -65,6 +66,8 @@ public final class ZoneView implements Screen {
     private final BorderPane body = new BorderPane();
     private final VBox head;
     private final javafx.scene.Node foot;
+    private final boolean gloved;
+    private boolean large;
     private Optional<Branch> pulled = Optional.empty();
 
     public ZoneView(Workplace workplace, ZoneModel model, RoundModel round, Navigator navigator, Density density) {
@@ -72,6 +75,7 @@ public final class ZoneView implements Screen {
         this.model = model;
         this.round = round;
         this.navigator = navigator;
+        this.gloved = density.hand() == Hand.GLOVED;
         this.wording = workplace.wording();
         model.unitsProperty().set(wording.units());
         model.localeProperty().set(wording.words().locale());
@@ -153,12 +157,18 @@ public final class ZoneView implements Screen {
         model.outcomeProperty().get().assessment().ifPresent(found -> {
             RulesPane rules = new RulesPane(found, wording, model.setting().form(), this::hideRules);
             result.getChildren().setAll(rules);
+            if (large) {
+                result.getChildren().add(0, form.caution());
+            }
             VBox.setVgrow(rules, Priority.ALWAYS);
         });
     }
 
     private void hideRules() {
         result.getChildren().setAll(picture, verdict);
+        if (large) {
+            result.getChildren().add(0, form.caution());
+        }
     }
 
     private FootBar footBar() {
@@ -326,6 +336,10 @@ public final class ZoneView implements Screen {
             body.setCenter(result);
         }
         entry.turned(portrait);
+        large = gloved && !portrait;
+        result.getChildren().remove(form.caution());
+        form.shrink(large);
+        hideRules();
         focusActive();
     }
 

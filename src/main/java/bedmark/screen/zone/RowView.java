@@ -150,7 +150,7 @@ final class RowView extends VBox {
         Optional<ZoneModel.Note> note = here ? model.noteProperty().get() : Optional.empty();
         message.setText(note.map(this::sentence).orElse(""));
         boolean wrong = note.filter(RowView::isWrong).isPresent();
-        message.getStyleClass().setAll("message", wrong ? "wrong" : "questioned");
+        message.getStyleClass().setAll("label", "message", wrong ? "wrong" : "questioned");
     }
 
     private void update(Slot slot, FieldBox box) {

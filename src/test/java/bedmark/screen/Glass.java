@@ -35,6 +35,9 @@ public final class Glass {
 
     /** Runs on the screen's thread, and hands back what came out or went wrong there. */
     public static <T> T on(Callable<T> work) throws Exception {
+        if (Platform.isFxApplicationThread()) {
+            return work.call();
+        }
         FxToolkit.registerPrimaryStage();
         CompletableFuture<T> result = new CompletableFuture<>();
         Platform.runLater(() -> {

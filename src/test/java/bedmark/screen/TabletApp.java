@@ -1,7 +1,5 @@
 package bedmark.screen;
 
-import static org.junit.jupiter.api.Assertions.assertNotNull;
-
 import bedmark.index.Store;
 import java.nio.file.Path;
 import java.time.Clock;
@@ -126,14 +124,21 @@ public final class TabletApp implements AutoCloseable {
 
     /** The node with an id. */
     public Node node(String id) {
-        Node node = shell.scene().lookup("#" + id);
-        assertNotNull(node, "there is nothing called " + id);
-        return node;
+        return find(id).orElseThrow(() -> new AssertionError("there is nothing called " + id));
     }
 
     /** Whether there is a node with that id. */
     public boolean has(String id) {
-        return shell.scene().lookup("#" + id) != null;
+        return find(id).isPresent();
+    }
+
+    /** Looks on the screen's own thread, since the screen may be changing. */
+    private Optional<Node> find(String id) {
+        try {
+            return Glass.on(() -> Optional.ofNullable(shell.scene().lookup("#" + id)));
+        } catch (Exception e) {
+            throw new IllegalStateException("the screen cannot be searched", e);
+        }
     }
 
     /** Takes a picture of the screen. */

@@ -70,7 +70,7 @@ class BadInputTest {
         "0.1280 | 1e99 | /plant/materials/0/skirtFrictionFactor (17:",
         "\"near\": 0.8, | \"near\": 1.8, | the near limit 1.8 lies beyond the overloaded one 0.95",
         "\"supersedes\": null | \"supersedes\": \"0b2f6c1e-6f0e-4f6f-9a70-0d0e3f8f1a03\" | revision is not lower",
-        "\"worn\", \"length\": {\"value\": 20, | \"worn\", \"length\": {\"value\": 15, | the left side add up to 4.572 m",
+        "\"worn\", \"length\": {\"value\": 20, | \"worn\", \"length\": {\"value\": 15, | left side add up to 4.572 m",
         "\"position\": {\"value\": 3, | \"position\": {\"value\": 7, | beyond the zone",
         "\"position\": {\"value\": 3, | \"position\": {\"value\": 0.0, | there is a station at"})
     void impossibleBundleNamesPlaceAndRemedy(String was, String becomes, String said) throws IOException {

@@ -11,9 +11,14 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.logging.Level;
+import java.util.logging.Logger;
 
 /** The program: wires its parts by hand and hands over to a command or to the screen. */
 public final class Bedmark {
+    /** The toolkit warns at each start that it is not in a module; held here, since loggers are kept weakly. */
+    private static final Logger TOOLKIT = Logger.getLogger("javafx");
+
     private Bedmark() {
     }
 
@@ -31,6 +36,7 @@ public final class Bedmark {
         if (linux && System.getenv("DISPLAY") == null && System.getenv("WAYLAND_DISPLAY") == null) {
             return false;
         }
+        TOOLKIT.setLevel(Level.SEVERE);
         Clock clock = Clock.systemDefaultZone();
         try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
             return BedmarkApp.open(store, clock, samples, load);

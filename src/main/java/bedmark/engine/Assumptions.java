@@ -10,6 +10,7 @@ import bedmark.engine.uncertainty.Uncertain;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 
 /** What was taken for granted in the results of one zone. */
@@ -19,10 +20,12 @@ final class Assumptions {
 
     private final ZoneFacts zone;
     private final FeedFacts today;
+    private final Map<DragMethod, Deduced<Uncertain>> methods;
 
-    Assumptions(FeedFacts today) {
+    Assumptions(FeedFacts today, Map<DragMethod, Deduced<Uncertain>> methods) {
         zone = today.zone();
         this.today = today;
+        this.methods = methods;
     }
 
     /**
@@ -45,9 +48,15 @@ final class Assumptions {
     private void geometry(Set<Assumption> all) {
         fromRegister(all, zone.spacing(), Datum.READ_SPACING, Datum.REGISTER_SPACING);
         fromRegister(all, zone.height(), Datum.READ_HEIGHT, Datum.REGISTER_HEIGHT);
-        absent(all, "incline-level", Datum.INCLINE, zone.accelerationLength());
+        if (zone.settings().conventions().incline()) {
+            absent(all, "incline-level", Datum.INCLINE, zone.accelerationLength());
+        } else if (zone.number(Datum.INCLINE).isKnown() && zone.accelerationLength().isKnown()) {
+            all.add(Assumption.of("incline-not-counted"));
+        }
         absent(all, "feed-velocity-zero", Datum.FEED_VELOCITY, today.loadingForce());
-        absent(all, "impact-length-zero", Datum.IMPACT_LENGTH, zone.settlingLength());
+        if (zone.settings().conventions().lengths().bySpeed()) {
+            absent(all, "impact-length-zero", Datum.IMPACT_LENGTH, zone.settlingLength());
+        }
         if (zone.designDepth().value().filter(depth -> depth.value() == 0).isPresent()) {
             all.add(Assumption.of("design-flow-carried-by-trough"));
         }
@@ -67,9 +76,9 @@ final class Assumptions {
     }
 
     private void material(Set<Assumption> all) {
-        if (today.methods().get(DragMethod.RANKINE).isKnown()) {
+        if (methods.get(DragMethod.RANKINE).isKnown()) {
             all.add(Assumption.of("repose-for-friction-angle"));
-            absent(all, "wall-friction-one", Datum.WALL_FRICTION, today.methods().get(DragMethod.RANKINE));
+            absent(all, "wall-friction-one", Datum.WALL_FRICTION, methods.get(DragMethod.RANKINE));
         }
     }
 
@@ -100,7 +109,11 @@ final class Assumptions {
                         Double.toString(rates.multiplier(segment.type(), segment.condition()))));
             }
         }
-        if (rates.rate() != SealRates.CONVENTION && zone.sealDrag().isKnown()) {
+        boolean fitted = zone.method() == DragMethod.SITE && zone.number(Datum.SITE_SEAL_RATE).isKnown();
+        if (fitted) {
+            all.add(Assumption.of("seal-rate-fitted",
+                    Double.toString(zone.number(Datum.SITE_SEAL_RATE).get().value())));
+        } else if (rates.rate() != SealRates.CONVENTION && zone.sealDrag().isKnown()) {
             all.add(Assumption.of("seal-rate-site", Double.toString(rates.rate())));
         }
     }

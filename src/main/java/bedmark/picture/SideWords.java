@@ -146,11 +146,18 @@ final class SideWords {
         return Math.round(exaggeration * 100) / 100.0;
     }
 
+    /** The middle of the greater room over or under the line of the allowed depth. */
+    private double promptMiddle() {
+        double top = layout.boardTop(sketch);
+        double limit = sketch.limit().map(allowed -> scale.y(allowed.depth())).filter(y -> y > top).orElse(top);
+        return limit - top > plot.bottom() - limit ? (top + limit) / 2 : (limit + plot.bottom()) / 2;
+    }
+
     private void prompt() {
         sketch.captions().prompt().ifPresent(text -> {
             Draft.Style style = Draft.Style.ASIDE.unknown();
             List<String> lines = draft.lines(text, style, plot.width() - draft.mm(6));
-            double first = (layout.boardTop(sketch) + plot.bottom()) / 2 - (lines.size() - 1) * draft.mm(Draft.ROW) / 2;
+            double first = promptMiddle() - (lines.size() - 1) * draft.mm(Draft.ROW) / 2;
             for (int i = 0; i < lines.size(); i++) {
                 draft.writeCentred(lines.get(i), style, plot.centre().x(), first + i * draft.mm(Draft.ROW));
             }

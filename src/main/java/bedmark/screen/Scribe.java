@@ -27,7 +27,7 @@ import javafx.beans.property.ReadOnlyObjectWrapper;
 public final class Scribe implements AutoCloseable {
 
     /** One act that waits. */
-    private record Job(String person, Act act, Consumer<Entry> saved) {
+    private record Job(String person, Act act, Consumer<Entry> saved, Runnable refused) {
     }
 
     private final Store store;
@@ -55,9 +55,19 @@ public final class Scribe implements AutoCloseable {
      * @param saved told by the screen's executor once the act is on the medium
      */
     public void save(String person, Act act, Consumer<Entry> saved) {
+        save(person, act, saved, () -> { });
+    }
+
+    /**
+     * Saves an act. Called by the screen.
+     *
+     * @param saved   told by the screen's executor once the act is on the medium
+     * @param refused told in the same way where the act is impossible as things stand, and given up
+     */
+    public void save(String person, Act act, Consumer<Entry> saved, Runnable refused) {
         waiting.set(waiting.get() + 1);
         pen.execute(() -> {
-            line.addLast(new Job(person, act, saved));
+            line.addLast(new Job(person, act, saved, refused));
             writeAll();
         });
     }
@@ -93,6 +103,7 @@ public final class Scribe implements AutoCloseable {
                 screen.execute(() -> {
                     waiting.set(waiting.get() - 1);
                     trouble.set(Optional.of(e.defect()));
+                    job.refused().run();
                 });
             }
         }

@@ -97,6 +97,8 @@ final class Zones {
         maybe(random, data, Datum.REGISTER_HEIGHT, between(random, 0.1, 1.2));
         maybe(random, data, Datum.IMPACT_LENGTH, between(random, 0, 4));
         maybe(random, data, Datum.LUMP_SIZE, between(random, 0.005, 0.5));
+        maybe(random, data, Datum.SITE_FACTOR, between(random, 0.005, 0.3));
+        maybe(random, data, Datum.SITE_SEAL_RATE, between(random, 5, 200));
         LoadingZone zone = LoadingZone.UNKNOWN.with(data).withStations(stations(random, length, height))
                 .withSeals(seals(random, length));
         for (LoadingZone.Mark mark : LoadingZone.Mark.values()) {
@@ -116,13 +118,13 @@ final class Zones {
                         segment.condition(), exact(segment.length()))).toList());
     }
 
-    /** The standard settings with exact instruments and factors. */
+    /** The standard settings with exact instruments and factors, methods taken to agree. */
     static Settings exactSettings() {
         Instruments exact = INSTRUMENTS;
         for (Instrument instrument : Instrument.values()) {
             exact = exact.with(instrument, 0);
         }
-        return Settings.standard().with(exact).withGrip(0.6, 0.6);
+        return Settings.standard().with(exact).with(Conventions.standard().withGrip(0.6, 0.6).withSpread(false));
     }
 
     private static Reading exact(Reading reading) {

@@ -6,12 +6,9 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
 import bedmark.screen.theme.Theme;
-import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.HashSet;
-import java.util.Set;
 import java.util.concurrent.Callable;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.ExecutionException;
@@ -21,7 +18,7 @@ import javafx.geometry.Rectangle2D;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
 import javafx.scene.SnapshotParameters;
-import javafx.scene.image.PixelReader;
+import javafx.scene.image.PixelFormat;
 import javafx.scene.image.WritableImage;
 import javafx.scene.paint.Color;
 import javafx.scene.transform.Transform;
@@ -101,18 +98,12 @@ public final class Glass {
     private static void write(Path file, WritableImage image) throws IOException {
         int width = (int) image.getWidth();
         int height = (int) image.getHeight();
-        PixelReader pixels = image.getPixelReader();
-        Set<Integer> colours = new HashSet<>();
-        BufferedImage copy = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB);
-        for (int y = 0; y < height; y++) {
-            for (int x = 0; x < width; x++) {
-                copy.setRGB(x, y, pixels.getArgb(x, y));
-                colours.add(pixels.getArgb(x, y) & 0xFFFFFF);
-            }
-        }
-        assertFalse(colours.contains(0xFF00FF), "part of the glass is bare");
-        assertTrue(colours.size() > 50, "next to nothing is shown");
+        int[] pixels = new int[width * height];
+        image.getPixelReader().getPixels(0, 0, width, height, PixelFormat.getIntArgbInstance(), pixels, 0, width);
+        Palette palette = Palette.of(pixels);
+        assertFalse(palette.holds(0xFF00FF), "part of the glass is bare");
+        assertTrue(palette.colours() > 50, "next to nothing is shown");
         Files.createDirectories(file.toAbsolutePath().getParent());
-        ImageIO.write(copy, "png", file.toFile());
+        ImageIO.write(palette.paint(pixels, width, height), "png", file.toFile());
     }
 }

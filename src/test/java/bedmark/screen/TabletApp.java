@@ -27,6 +27,7 @@ public final class TabletApp implements AutoCloseable {
 
     private final Store store;
     private final FxRobot robot = new FxRobot();
+    private volatile Path exportFolder;
     private Workplace workplace;
     private Shell shell;
 
@@ -38,9 +39,10 @@ public final class TabletApp implements AutoCloseable {
     public TabletApp(Path folder, Optional<Path> samples, Path exportFolder, Clock clock,
                      double width, double height) throws Exception {
         store = Store.open(folder, BedmarkApp.options(clock));
+        this.exportFolder = exportFolder;
         Stage stage = FxToolkit.registerPrimaryStage();
         Glass.on(() -> {
-            workplace = new Workplace(store, clock, Platform::runLater, (title, begin) -> Optional.of(exportFolder),
+            workplace = new Workplace(store, clock, Platform::runLater, (title, begin) -> Optional.of(folder()),
                     samples);
             shell = new Shell(workplace, width, height);
             stage.setScene(shell.scene());
@@ -49,6 +51,15 @@ public final class TabletApp implements AutoCloseable {
             return null;
         });
         settle();
+    }
+
+    private Path folder() {
+        return exportFolder;
+    }
+
+    /** What the person chooses from now on when asked for a folder. */
+    public void exportsTo(Path chosen) {
+        exportFolder = chosen;
     }
 
     public Workplace workplace() {

@@ -3,7 +3,8 @@ package bedmark.engine.flow;
 import bedmark.engine.uncertainty.Uncertain;
 
 /**
- * Length that a loading zone needs for its bed and its dust to settle.
+ * Length that a loading zone needs for its bed and its dust to settle: the longest of those conventions that a site
+ * goes by.
  *
  * <pre>max(Li + τ v, l_b, 3 ft)</pre>
  *
@@ -16,9 +17,16 @@ public final class SettlingLength {
     private SettlingLength() {
     }
 
-    /** The length (m). */
-    public static Uncertain of(Uncertain impactLength, Uncertain beltSpeed, Uncertain accelerationLength,
-            boolean highAirFlow) {
-        return impactLength.plus(beltSpeed.times(highAirFlow ? 1.8 : 1.2)).max(accelerationLength).max(LEAST);
+    /** The length (m); 0 where the site goes by no convention. */
+    public static Uncertain of(LengthConventions conventions, Uncertain impactLength, Uncertain beltSpeed,
+            Uncertain accelerationLength, boolean highAirFlow) {
+        Uncertain longest = Uncertain.ZERO;
+        if (conventions.bySpeed()) {
+            longest = impactLength.plus(beltSpeed.times(highAirFlow ? 1.8 : 1.2));
+        }
+        if (conventions.byAcceleration()) {
+            longest = longest.max(accelerationLength);
+        }
+        return conventions.least() ? longest.max(LEAST) : longest;
     }
 }

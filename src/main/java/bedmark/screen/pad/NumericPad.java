@@ -7,6 +7,8 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Stream;
+import javafx.beans.value.ObservableValue;
 import javafx.geometry.Pos;
 import javafx.scene.control.Button;
 import javafx.scene.control.ContentDisplay;
@@ -17,7 +19,10 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.RowConstraints;
 import javafx.scene.layout.StackPane;
 
-/** The keys of the pad, five across and four down, as wide and high as there is room. */
+/**
+ * The keys of the pad, as wide and high as there is room: five across and four down, or seven across and three down
+ * where the tablet stands upright.
+ */
 public final class NumericPad extends StackPane {
     private static final List<List<PadKey>> ROWS = List.of(
             List.of(PadKey.DIGIT_7, PadKey.DIGIT_8, PadKey.DIGIT_9, PadKey.STEP_DOWN, PadKey.BACKSPACE),
@@ -25,39 +30,66 @@ public final class NumericPad extends StackPane {
             List.of(PadKey.DIGIT_1, PadKey.DIGIT_2, PadKey.DIGIT_3, PadKey.FRACTION, PadKey.BACK),
             List.of(PadKey.DIGIT_0, PadKey.DECIMAL, PadKey.SIGN, PadKey.UNDO, PadKey.NEXT));
 
+    private static final List<List<PadKey>> FLAT = List.of(
+            List.of(PadKey.DIGIT_7, PadKey.DIGIT_8, PadKey.DIGIT_9, PadKey.STEP_DOWN, PadKey.STEP_UP, PadKey.UNIT,
+                    PadKey.BACKSPACE),
+            List.of(PadKey.DIGIT_4, PadKey.DIGIT_5, PadKey.DIGIT_6, PadKey.FRACTION, PadKey.SIGN, PadKey.UNDO,
+                    PadKey.BACK),
+            List.of(PadKey.DIGIT_1, PadKey.DIGIT_2, PadKey.DIGIT_3, PadKey.DIGIT_0, PadKey.DECIMAL, PadKey.NEXT));
+
     private final PadModel model;
     private final PadWords words;
     private final Map<PadKey, Button> keys = new EnumMap<>(PadKey.class);
+    private boolean undo;
 
-    public NumericPad(PadModel model, PadWords words) {
+    private final GridPane grid = new GridPane();
+
+    /** @param undoable whether there is something that can be taken back */
+    public NumericPad(PadModel model, PadWords words, ObservableValue<Boolean> undoable) {
         this.model = model;
         this.words = words;
         getStyleClass().add("numeric-pad");
-        getChildren().addAll(grid(), note());
+        grid.getStyleClass().add("keys");
+        Stream.of(PadKey.values()).forEach(this::key);
+        layOut(ROWS);
+        getChildren().addAll(grid, note());
+        undoable.subscribe(can -> {
+            undo = can;
+            offer();
+        });
         model.setupProperty().subscribe(setup -> offer());
     }
 
-    private GridPane grid() {
-        GridPane grid = new GridPane();
-        grid.getStyleClass().add("keys");
-        for (int row = 0; row < ROWS.size(); row++) {
-            for (int column = 0; column < ROWS.get(row).size(); column++) {
-                grid.add(key(ROWS.get(row).get(column)), column, row);
+    /** Told when the tablet is turned. */
+    public void turned(boolean portrait) {
+        layOut(portrait ? FLAT : ROWS);
+    }
+
+    /** A row with fewer keys gives the room to its last one. */
+    private void layOut(List<List<PadKey>> rows) {
+        grid.getChildren().clear();
+        grid.getRowConstraints().clear();
+        grid.getColumnConstraints().clear();
+        int across = rows.get(0).size();
+        for (int row = 0; row < rows.size(); row++) {
+            List<PadKey> line = rows.get(row);
+            for (int column = 0; column < line.size(); column++) {
+                grid.add(keys.get(line.get(column)), column, row,
+                        column == line.size() - 1 ? across - column : 1, 1);
             }
             RowConstraints equal = new RowConstraints();
-            equal.setPercentHeight(100.0 / ROWS.size());
+            equal.setPercentHeight(100.0 / rows.size());
             equal.setVgrow(Priority.ALWAYS);
             grid.getRowConstraints().add(equal);
         }
-        for (int column = 0; column < ROWS.get(0).size(); column++) {
+        for (int column = 0; column < across; column++) {
             ColumnConstraints equal = new ColumnConstraints();
-            equal.setPercentWidth(100.0 / ROWS.get(0).size());
+            equal.setPercentWidth(100.0 / across);
             grid.getColumnConstraints().add(equal);
         }
-        return grid;
     }
 
-    private Button key(PadKey key) {
+    private void key(PadKey key) {
         Button button = new Button();
         button.getStyleClass().addAll("pad-key", key.digit() >= 0 || key == PadKey.DECIMAL ? "figure" : "word");
         button.setId("pad-" + key.name().toLowerCase(Locale.ROOT).replace('_', '-'));
@@ -72,7 +104,6 @@ public final class NumericPad extends StackPane {
             button.getStyleClass().add("primary");
         }
         keys.put(key, button);
-        return button;
     }
 
     /** The refusal, on a plate over the upper edge of the keys, where it covers no face of a key. */
@@ -95,7 +126,7 @@ public final class NumericPad extends StackPane {
             String face = face(key, setup);
             button.setText(face);
             button.setAccessibleText(name(key, face));
-            button.setDisable(!model.offers(key));
+            button.setDisable(!model.offers(key) || key == PadKey.UNDO && !undo);
         });
     }
 

@@ -1,5 +1,6 @@
 package bedmark.screen.part;
 
+import java.util.List;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleBooleanProperty;
@@ -24,6 +25,8 @@ public final class FieldBox extends HBox {
     static final PseudoClass QUESTIONED = PseudoClass.getPseudoClass("questioned");
     static final PseudoClass WRONG = PseudoClass.getPseudoClass("wrong");
 
+    private final VBox lines = new VBox();
+    private final HBox top = new HBox();
     private final Label name = Labels.label("box-name");
     private final Label value = Labels.label("value");
     private final Label unit = Labels.label("unit");
@@ -44,14 +47,22 @@ public final class FieldBox extends HBox {
         setFocusTraversable(true);
         Region between = new Region();
         HBox.setHgrow(between, Priority.ALWAYS);
-        HBox row = new HBox(value, unit, between, ghost);
+        Region caret = new Region();
+        caret.getStyleClass().add("caret");
+        caret.visibleProperty().bind(active.and(value.textProperty().isEmpty()));
+        caret.managedProperty().bind(caret.visibleProperty());
+        HBox row = new HBox(caret, value, unit, between, ghost);
         row.getStyleClass().add("row");
         row.setAlignment(Pos.BASELINE_LEFT);
-        VBox lines = new VBox(this.name, row);
+        top.getStyleClass().add("row");
+        Region beside = new Region();
+        HBox.setHgrow(beside, Priority.ALWAYS);
+        top.getChildren().addAll(this.name, beside);
+        lines.getChildren().addAll(top, row);
         lines.setAlignment(Pos.CENTER_LEFT);
         HBox.setHgrow(lines, Priority.ALWAYS);
         lines.setMinWidth(0);
-        this.name.managedProperty().bind(this.name.textProperty().isNotEmpty());
+        top.managedProperty().bind(this.name.textProperty().isNotEmpty());
         setAlignment(Pos.CENTER);
         setFillHeight(false);
         getChildren().add(lines);
@@ -74,6 +85,27 @@ public final class FieldBox extends HBox {
                 chosen.run();
             }
         });
+    }
+
+    /** Puts the ghost beside the name, where the box is too narrow for it beside the value. */
+    public FieldBox withGhostAbove() {
+        top.getChildren().add(ghost);
+        ghost.setMinWidth(Region.USE_PREF_SIZE);
+        return this;
+    }
+
+    /** Lets the value run over several lines with the ghost below it: it is words and no number. */
+    public FieldBox ofWords() {
+        getStyleClass().add("words");
+        lines.getChildren().add(ghost);
+        for (Label label : List.of(value, ghost)) {
+            label.setMinHeight(Region.USE_PREF_SIZE);
+        }
+        ghost.setWrapText(true);
+        ghost.managedProperty().bind(ghost.textProperty().isNotEmpty());
+        value.setMinWidth(0);
+        value.setWrapText(true);
+        return this;
     }
 
     /** The name inside the box, over the value; empty where it stands beside or above the box. */

@@ -27,6 +27,9 @@ public final class TopBar extends HBox {
         aside.setMinWidth(USE_PREF_SIZE);
         getChildren().addAll(title, subtitle, between, aside);
         getChildren().addAll(more);
+        if (more.length > 0) {
+            getStyleClass().add("with-button");
+        }
     }
 
     public StringProperty titleProperty() {

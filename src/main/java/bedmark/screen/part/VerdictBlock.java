@@ -22,6 +22,7 @@ public final class VerdictBlock extends VBox {
     private final Label sure = Labels.label("sure");
     private final Label advice = Labels.wrapped("advice", "");
     private final List<FigureBlock> figures = Stream.generate(FigureBlock::new).limit(Verdict.FIGURES).toList();
+    private final GridPane numbers = grid();
 
     /**
      * @param action what can be done about it, beside the advice; usually one button
@@ -40,14 +41,14 @@ public final class VerdictBlock extends VBox {
         HBox.setHgrow(advice, Priority.ALWAYS);
         advice.setMaxWidth(Double.MAX_VALUE);
         action.ifPresent(foot.getChildren()::add);
-        getChildren().addAll(head, numbers(), foot);
+        getChildren().addAll(head, numbers, foot);
         setFocusTraversable(false);
     }
 
-    private GridPane numbers() {
+    private GridPane grid() {
         GridPane grid = new GridPane();
         grid.getStyleClass().add("figures");
-        double[] shares = {28, 28, 26, 18};
+        double[] shares = {31, 27, 22, 20};
         for (int i = 0; i < figures.size(); i++) {
             ColumnConstraints column = new ColumnConstraints();
             column.setPercentWidth(shares[i]);
@@ -64,6 +65,8 @@ public final class VerdictBlock extends VBox {
         sure.setText(verdict.sure());
         advice.setText(verdict.advice().orElse(""));
         getStyleClass().setAll("verdict", verdict.level().styleClass());
+        numbers.setVisible(!verdict.figures().isEmpty());
+        numbers.setManaged(!verdict.figures().isEmpty());
         for (int i = 0; i < figures.size(); i++) {
             figures.get(i).setVisible(i < verdict.figures().size());
             if (i < verdict.figures().size()) {

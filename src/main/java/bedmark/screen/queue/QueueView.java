@@ -13,19 +13,25 @@ import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
 import bedmark.screen.round.RoundModel;
 import bedmark.screen.theme.Icon;
+import bedmark.screen.theme.LevelGlyph;
+import bedmark.screen.theme.LevelShape;
+import bedmark.survey.InspectionStatus;
 import bedmark.survey.Register;
 import bedmark.wording.Wording;
 import java.nio.file.Path;
 import java.time.format.DateTimeFormatter;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
-import java.util.stream.Collectors;
 import javafx.scene.Node;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ProgressBar;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
@@ -33,6 +39,9 @@ import javafx.scene.layout.VBox;
 /** The way to the office: completed surveys into the queue, the queue into a folder or onto a stick, the receipt. */
 public final class QueueView implements Screen {
     private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm");
+
+    private static final List<LevelShape> WORST_FIRST = List.of(LevelShape.OVERLOADED, LevelShape.UNDECIDED,
+            LevelShape.INCOMPLETE, LevelShape.NEAR, LevelShape.WITHIN, LevelShape.NOT_INSPECTED);
 
     private final Workplace workplace;
     private final QueueModel model;
@@ -88,20 +97,19 @@ public final class QueueView implements Screen {
         List<SurveyLine> completed = model.completedProperty().get();
         List<SurveyLine> queued = model.queuedProperty().get();
         steps.getChildren().setAll(new SectionHeader(wording.text("screen.queue.completed")),
-                wrapped(completed.isEmpty() ? wording.text("screen.queue.none-completed") : tags(completed)));
-        ActionButton queue = button("queue-all", completed.isEmpty() ? Weight.PLAIN : Weight.PRIMARY,
-                wording.text("screen.queue.queue-all", completed.size()), model::queueAll);
-        queue.setDisable(completed.isEmpty());
-        steps.getChildren().addAll(queue, new SectionHeader(wording.text("screen.queue.queued")),
-                wrapped(queued.isEmpty() ? wording.text("screen.queue.none-queued") : tags(queued)));
+                completed.isEmpty() ? wrapped(wording.text("screen.queue.none-completed")) : tags(completed));
+        if (!completed.isEmpty()) {
+            steps.getChildren().add(button("queue-all", Weight.PRIMARY,
+                    wording.text("screen.queue.queue-all", completed.size()), model::queueAll));
+        }
+        steps.getChildren().addAll(new SectionHeader(wording.text("screen.queue.queued")),
+                queued.isEmpty() ? wrapped(wording.text("screen.queue.none-queued")) : tags(queued));
         if (model.progressProperty().get() >= 0) {
             steps.getChildren().addAll(wrapped(wording.text("screen.queue.exporting")), bar,
                     button("cancel-export", Weight.PLAIN, wording.text("screen.cancel"), model::cancel));
-        } else {
-            ActionButton export = button("export", queued.isEmpty() ? Weight.PLAIN : Weight.PRIMARY,
-                    wording.text("screen.queue.export", queued.size()), this::export);
-            export.setDisable(queued.isEmpty());
-            steps.getChildren().add(export);
+        } else if (!queued.isEmpty()) {
+            steps.getChildren().add(button("export", Weight.PRIMARY,
+                    wording.text("screen.queue.export", queued.size()), this::export));
         }
         steps.getChildren().add(wrapped(wording.text("screen.queue.not-deleted")));
     }
@@ -113,10 +121,27 @@ public final class QueueView implements Screen {
         return button;
     }
 
-    private String tags(List<SurveyLine> lines) {
+    /** The surveys by tag, each with what was found; the worst first. */
+    private FlowPane tags(List<SurveyLine> lines) {
         Register register = workplace.site().register();
-        return lines.stream().map(line -> register.transfer(line.transfer()).map(Register.Transfer::tag)
-                .orElse(line.transfer())).collect(Collectors.joining(", "));
+        FlowPane tags = new FlowPane();
+        tags.getStyleClass().add("tags");
+        lines.stream().sorted(Comparator.comparing(line -> WORST_FIRST.indexOf(shape(line)))).forEach(line -> {
+            Label tag = new Label(register.transfer(line.transfer()).map(Register.Transfer::tag)
+                    .orElse(line.transfer()));
+            tag.getStyleClass().add("tag");
+            LevelGlyph glyph = new LevelGlyph(shape(line));
+            glyph.setAccessibleText(wording.text("verdict.level." + shape(line).styleClass()));
+            HBox one = new HBox(glyph, tag);
+            one.getStyleClass().add("one");
+            tags.getChildren().add(one);
+        });
+        return tags;
+    }
+
+    private static LevelShape shape(SurveyLine line) {
+        return line.inspectionStatus() != InspectionStatus.INSPECTED || line.level().isEmpty()
+                ? LevelShape.NOT_INSPECTED : LevelShape.valueOf(line.level().toUpperCase(Locale.ROOT).replace('-', '_'));
     }
 
     private void export() {
@@ -129,8 +154,8 @@ public final class QueueView implements Screen {
         model.troubleProperty().get().ifPresent(defect -> {
             Label trouble = wrapped(wording.sentence(defect));
             trouble.getStyleClass().add("trouble-text");
-            outcome.getChildren().addAll(new SectionHeader(wording.text("screen.queue.failed")), trouble,
-                    wrapped(wording.text("screen.queue.still-here")));
+            trouble.setId("trouble");
+            outcome.getChildren().addAll(new SectionHeader(wording.text("screen.queue.failed")), trouble);
         });
         model.receiptProperty().get().ifPresent(this::showReceipt);
         outcome.getChildren().add(new SectionHeader(wording.text("screen.queue.left")));

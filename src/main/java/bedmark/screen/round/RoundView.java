@@ -27,6 +27,8 @@ import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
@@ -41,7 +43,9 @@ public final class RoundView implements Screen {
     private final Wording wording;
     private final Listening listening = new Listening();
     private final VBox list = new VBox();
+    private final ScrollPane scroll = new ScrollPane(list);
     private final VBox summary = new VBox();
+    private boolean portrait;
     private final BorderPane body = new BorderPane();
     private final CustomTextField search = new CustomTextField();
     private final VBox head;
@@ -55,7 +59,6 @@ public final class RoundView implements Screen {
         this.head = Heads.head(workplace, listening, model.round().name(), workplace.site().register().name());
         this.foot = footBar();
         list.getStyleClass().add("rows");
-        ScrollPane scroll = new ScrollPane(list);
         scroll.setFitToWidth(true);
         scroll.getStyleClass().add("form-scroll");
         VBox.setVgrow(scroll, Priority.ALWAYS);
@@ -104,17 +107,15 @@ public final class RoundView implements Screen {
         names.setAlignment(Pos.CENTER_LEFT);
         HBox.setHgrow(names, Priority.ALWAYS);
         names.setMinWidth(0);
-        Label state = new Label(state(row));
-        state.getStyleClass().add("state");
-        state.setMinWidth(Region.USE_PREF_SIZE);
-        HBox content = new HBox(glyph, names, state);
+        HBox content = new HBox(glyph, names, states(row));
         content.getStyleClass().add("stop");
         content.setAlignment(Pos.CENTER_LEFT);
         ActionButton open = new ActionButton(Weight.PLAIN, "", () -> navigator.toZone(model, row));
         open.setGraphic(content);
         open.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
         open.setId("stop-" + row.transfer());
-        open.setAccessibleText(row.tag() + ", " + row.what() + ", " + state(row));
+        open.setAccessibleText(row.tag() + ", " + row.what() + ", " + now(row).map(now -> now + ", ").orElse("")
+                + last(row));
         open.getStyleClass().add("secondary-target");
         open.setMaxWidth(Double.MAX_VALUE);
         content.prefWidthProperty().bind(open.widthProperty().subtract(36));
@@ -135,17 +136,50 @@ public final class RoundView implements Screen {
                 : LevelShape.valueOf(row.level().toUpperCase(Locale.ROOT).replace('-', '_'));
     }
 
-    private String state(RoundRow row) {
-        String last = row.lastLevel().isEmpty() ? wording.text("screen.round.never")
-                : wording.text("screen.round.last", wording.text("verdict.level." + row.lastLevel()));
+    /** What was found now stands out over what was found last time. */
+    private VBox states(RoundRow row) {
+        VBox states = new VBox();
+        states.setAlignment(Pos.CENTER_RIGHT);
+        now(row).ifPresent(words -> {
+            Label now = new Label(words);
+            now.getStyleClass().addAll("now", row.level().isEmpty() ? "none" : row.level());
+            states.getChildren().add(now);
+        });
+        Label last = new Label(last(row));
+        last.getStyleClass().add("state");
+        states.getChildren().add(last);
+        states.setMinWidth(Region.USE_PREF_SIZE);
+        return states;
+    }
+
+    private Optional<String> now(RoundRow row) {
         return switch (row.progress()) {
-            case TO_DO -> last;
-            case BEGUN -> wording.text("screen.round.begun") + "\n" + last;
-            case DONE -> wording.text("verdict.level." + (row.level().isEmpty() ? "incomplete" : row.level()))
-                    + "\n" + last;
-            case SKIPPED -> wording.text("screen.status." + row.survey().orElseThrow().inspectionStatus().code())
-                    + "\n" + last;
+            case TO_DO -> Optional.empty();
+            case BEGUN -> Optional.of(wording.text("screen.round.begun"));
+            case DONE -> Optional.of(wording.text("verdict.level."
+                    + (row.level().isEmpty() ? "incomplete" : row.level())));
+            case SKIPPED -> Optional.of(wording.text("screen.status."
+                    + row.survey().orElseThrow().inspectionStatus().code()));
         };
+    }
+
+    private String last(RoundRow row) {
+        return row.lastLevel().isEmpty() ? wording.text("screen.round.never")
+                : wording.text("screen.round.last", wording.text("verdict.level." + row.lastLevel()));
+    }
+
+    /** Brings the stop where the walk goes on in sight, with the one before it. */
+    private void revealNext() {
+        model.nextToDo("").flatMap(row -> Optional.ofNullable(list.lookup("#stop-" + row.transfer())))
+                .ifPresent(stop -> {
+                    double room = scroll.getViewportBounds().getHeight();
+                    double all = list.getBoundsInLocal().getHeight();
+                    double top = stop.getParent().getBoundsInParent().getMinY()
+                            - stop.getParent().getBoundsInParent().getHeight() - list.getSpacing();
+                    if (room > 0 && all > room) {
+                        scroll.setVvalue(Math.max(0, Math.min(1, top / (all - room))));
+                    }
+                });
     }
 
     /** Skipping needs a reason: the four that happen, each one press. */
@@ -177,7 +211,16 @@ public final class RoundView implements Screen {
     private void summarise() {
         Map<LevelShape, Integer> counts = new EnumMap<>(LevelShape.class);
         model.rowsProperty().get().forEach(row -> counts.merge(shape(row), 1, Integer::sum));
-        summary.getChildren().setAll(new SectionHeader(wording.text("screen.round.found")));
+        GridPane found = new GridPane();
+        found.getStyleClass().add("found");
+        int columns = portrait ? 2 : 1;
+        for (int i = 0; i < columns; i++) {
+            ColumnConstraints column = new ColumnConstraints();
+            column.setPercentWidth(100.0 / columns);
+            found.getColumnConstraints().add(column);
+        }
+        summary.getChildren().setAll(new SectionHeader(wording.text("screen.round.found")), found);
+        int place = 0;
         for (LevelShape shape : List.of(LevelShape.OVERLOADED, LevelShape.UNDECIDED, LevelShape.INCOMPLETE,
                 LevelShape.NEAR, LevelShape.WITHIN, LevelShape.NOT_INSPECTED)) {
             LevelGlyph glyph = new LevelGlyph(shape);
@@ -189,7 +232,8 @@ public final class RoundView implements Screen {
             HBox line = new HBox(glyph, word, count);
             line.getStyleClass().add("summary-line");
             line.setAlignment(Pos.CENTER_LEFT);
-            summary.getChildren().add(line);
+            found.add(line, portrait ? place / 3 : 0, portrait ? place % 3 : place);
+            place++;
         }
         ActionButton export = ActionButton.with(Icon.EXPORT, ContentDisplay.LEFT, Weight.PLAIN,
                 wording.text("screen.round.export"), () -> navigator.toQueue(model));
@@ -232,7 +276,9 @@ public final class RoundView implements Screen {
     }
 
     @Override
-    public void turned(boolean portrait) {
+    public void turned(boolean upright) {
+        portrait = upright;
+        summarise();
         body.setRight(null);
         body.setBottom(null);
         summary.getStyleClass().setAll("summary", portrait ? "portrait" : "landscape");
@@ -245,6 +291,7 @@ public final class RoundView implements Screen {
 
     @Override
     public void shown() {
+        revealNext();
         body.requestFocus();
     }
 

@@ -9,9 +9,10 @@ import bedmark.screen.Screen;
 import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
-import bedmark.screen.part.SectionHeader;
+import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.Weight;
 import bedmark.screen.round.RoundModel;
+import bedmark.screen.round.Ticks;
 import bedmark.screen.theme.Icon;
 import bedmark.survey.Round;
 import bedmark.wording.Wording;
@@ -76,6 +77,7 @@ public final class StartView implements Screen {
             return;
         }
         person.setId("person");
+        person.setAccessibleText(wording.text("screen.start.person"));
         person.setPromptText(wording.text("screen.start.person-prompt"));
         if (!person.textProperty().isBound()) {
             person.setText(model.personProperty().get());
@@ -83,9 +85,22 @@ public final class StartView implements Screen {
         }
         Label name = new Label(wording.text("screen.start.person"));
         name.setLabelFor(person);
-        questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()),
+        questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()), progress(),
                 pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
                 pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())));
+    }
+
+    /** How far the chosen round is: in words, and as its strip of ticks. */
+    private HBox progress() {
+        RoundModel round = new RoundModel(workplace, model.roundProperty().get());
+        RoundTicks ticks = new RoundTicks();
+        Ticks.show(ticks, round.rowsProperty().get(), "", wording);
+        HBox.setHgrow(ticks, Priority.ALWAYS);
+        Label words = new Label(wording.text("screen.round.progress", round.done(), round.rowsProperty().get().size()));
+        words.setMinWidth(Region.USE_PREF_SIZE);
+        HBox progress = new HBox(words, ticks);
+        progress.getStyleClass().add("progress");
+        return progress;
     }
 
     private static HBox pair(VBox left, VBox right) {

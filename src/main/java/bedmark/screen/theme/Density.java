@@ -16,8 +16,9 @@ public record Density(double dpi, Hand hand) {
     public static final double DEFAULT_DPI = 149;
 
     private static final double MM_PER_INCH = 25.4;
+    private static final double GAP_MM = 0.85;
     private static final Pattern LENGTH = Pattern.compile("\\b(\\d+(?:\\.\\d+)?)mm\\b");
-    private static final Pattern TARGET = Pattern.compile("\\b(target|secondary|foot)-height\\b");
+    private static final Pattern TARGET = Pattern.compile("\\b(target-height|secondary-height|foot-height|entry-tall|entry-flat)\\b");
 
     public Density {
         if (!(dpi > 0)) {
@@ -61,6 +62,11 @@ public record Density(double dpi, Hand hand) {
         return mm(hand.secondary());
     }
 
+    /** So many rows of targets with their gaps, and a pixel for rounding. */
+    private double rows(int count) {
+        return count * target() + (count - 1) * Math.ceil(GAP_MM * perMm()) + 1;
+    }
+
     /**
      * A style sheet written out in pixels of this density: targets never less than asked for, all other millimetres
      * rounded, so that type and gaps stay as close as whole pixels allow.
@@ -68,8 +74,10 @@ public record Density(double dpi, Hand hand) {
     String transcribe(String sheet) {
         String targets = TARGET.matcher(sheet).replaceAll(match -> Matcher.quoteReplacement(
                 pixels(switch (match.group(1)) {
-                    case "target" -> target();
-                    case "secondary" -> secondary();
+                    case "target-height" -> target();
+                    case "secondary-height" -> secondary();
+                    case "entry-tall" -> rows(4);
+                    case "entry-flat" -> rows(3);
                     default -> mm(Hand.BARE.target());
                 })));
         return LENGTH.matcher(targets).replaceAll(match ->

@@ -30,13 +30,13 @@ import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
+import javafx.scene.layout.Pane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
 
 /** Where the active cell is filled in: the pad for numbers, buttons for choices, the keyboard for words. */
 final class EntryPane extends StackPane {
-    private static final int COLUMNS = 2;
     private static final int LONGEST_FACE = 7;
 
     private final ZoneModel model;
@@ -44,11 +44,12 @@ final class EntryPane extends StackPane {
     private final PadModel pad = new PadModel(this::command);
     private final NumericPad numericPad;
     private boolean editing;
+    private boolean portrait;
 
     EntryPane(ZoneModel model, Wording wording, Listening listening) {
         this.model = model;
         this.wording = wording;
-        this.numericPad = new NumericPad(pad, words(wording));
+        this.numericPad = new NumericPad(pad, words(wording), model.undoableProperty());
         getStyleClass().add("entry-pane");
         listening.to(model.inHandProperty(), inHand -> show(inHand.slot()));
         listening.onChange(model.typedProperty(), typed -> taken());
@@ -112,13 +113,31 @@ final class EntryPane extends StackPane {
             pad.close();
             getChildren().setAll(slot instanceof Slot.TextSlot text && !SlotWords.isMaterial(slot)
                     ? textPane(text) : choicePane(slot));
+            focusText();
         }
+    }
+
+    /** Told when the tablet is turned: there is less height for the keys and more width. */
+    void turned(boolean upright) {
+        if (portrait != upright) {
+            portrait = upright;
+            numericPad.turned(upright);
+            show(model.active());
+        }
+    }
+
+    /** Puts the focus into the text, where the active cell takes one. */
+    void focusText() {
+        Optional.ofNullable(lookup("#text-entry")).ifPresent(javafx.scene.Node::requestFocus);
     }
 
     /** Asks what the belt does, in place of the pad. */
     void askBeltState() {
         VBox pane = new VBox(new SectionHeader(wording.text("screen.belt.ask")));
         pane.getStyleClass().add("choice-pane");
+        Pane states = portrait ? new HBox() : new VBox();
+        states.getStyleClass().add("moves");
+        pane.getChildren().add(states);
         for (BeltState state : BeltState.values()) {
             boolean said = model.beltStateProperty().get().equals(Optional.of(state));
             ActionButton button = new ActionButton(said ? Weight.PRIMARY : Weight.PLAIN,
@@ -127,8 +146,11 @@ final class EntryPane extends StackPane {
                         show(model.active());
                     });
             button.setId("belt-" + state.code());
+            button.setMinWidth(0);
+            button.setPrefWidth(100);
             button.setMaxWidth(Double.MAX_VALUE);
-            pane.getChildren().add(button);
+            HBox.setHgrow(button, Priority.ALWAYS);
+            states.getChildren().add(button);
         }
         pad.close();
         getChildren().setAll(pane);
@@ -152,7 +174,7 @@ final class EntryPane extends StackPane {
     private String unitFace(List<Unit> units, Unit now) {
         String all = units.stream().map(wording::symbol).collect(Collectors.joining(" | "));
         return all.length() <= LONGEST_FACE ? all
-                : wording.symbol(units.get((units.indexOf(now) + 1) % units.size()));
+                : "\u2192 " + wording.symbol(units.get((units.indexOf(now) + 1) % units.size()));
     }
 
     private void command(PadCommand command) {
@@ -195,9 +217,10 @@ final class EntryPane extends StackPane {
     private VBox choicePane(Slot slot) {
         GridPane grid = new GridPane();
         grid.getStyleClass().add("choices");
-        for (int i = 0; i < COLUMNS; i++) {
+        int columns = portrait ? 4 : 2;
+        for (int i = 0; i < columns; i++) {
             ColumnConstraints column = new ColumnConstraints();
-            column.setPercentWidth(100.0 / COLUMNS);
+            column.setPercentWidth(100.0 / columns);
             grid.getColumnConstraints().add(column);
         }
         List<Choice> choices = choices(slot);
@@ -213,11 +236,13 @@ final class EntryPane extends StackPane {
                     });
             button.setId("choice-" + choice.code());
             button.getStyleClass().add("choice");
+            button.setMinWidth(0);
             button.setMaxWidth(Double.MAX_VALUE);
-            grid.add(button, i % COLUMNS, i / COLUMNS);
+            grid.add(button, i % columns, i / columns);
         }
         ScrollPane scroll = new ScrollPane(grid);
         scroll.setFitToWidth(true);
+        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         scroll.getStyleClass().add("form-scroll");
         VBox.setVgrow(scroll, Priority.ALWAYS);
         VBox pane = new VBox(scroll, moves());
@@ -262,7 +287,8 @@ final class EntryPane extends StackPane {
         });
         // A text of one line ends with Enter; in one of several lines Enter is a line end, and Tab leads on.
         area.addEventFilter(KeyEvent.KEY_PRESSED, event -> {
-            if (event.getCode() == KeyCode.ENTER && !slot.field().lines()) {
+            boolean on = event.getCode() == KeyCode.TAB || event.getCode() == KeyCode.ENTER && !slot.field().lines();
+            if (on) {
                 move(event.isShiftDown());
                 event.consume();
             }

@@ -9,7 +9,6 @@ import bedmark.wording.Wording;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import javafx.geometry.Bounds;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
@@ -40,8 +39,22 @@ final class FormPane extends VBox {
         listening.onChange(model.surveyProperty(), survey -> update());
         listening.onChange(model.typedProperty(), typed -> update());
         listening.onChange(model.noteProperty(), note -> update());
-        listening.onChange(model.beltStateProperty(), state -> caution());
+        listening.onChange(model.beltStateProperty(), state -> sayCaution());
         listening.to(model.inHandProperty(), inHand -> activated());
+    }
+
+    /** The caution, for whoever has a better place for it while there is no room here. */
+    CautionStrip caution() {
+        return caution;
+    }
+
+    /** Leaves the head and the caution out where large keys take the room, or takes them in again. */
+    void shrink(boolean small) {
+        if (small) {
+            getChildren().setAll(scroll);
+        } else {
+            getChildren().setAll(header, scroll, caution);
+        }
     }
 
     private void layOut(List<SlotRow> wanted) {
@@ -86,14 +99,14 @@ final class FormPane extends VBox {
             row.focusActive();
             reveal(row);
         });
-        caution();
+        sayCaution();
     }
 
     private Optional<RowView> active() {
         return rows.stream().filter(RowView::holdsActive).findFirst();
     }
 
-    /** Scrolls just so far that the row is in sight; the row before it too, where there is room for both. */
+    /** Brings the row in sight with the one before it where there is room for both; no row is cut at the top. */
     private void reveal(RowView row) {
         applyCss();
         layout();
@@ -102,18 +115,21 @@ final class FormPane extends VBox {
         if (room <= 0 || all <= room) {
             return;
         }
-        Bounds bounds = row.getBoundsInParent();
-        double top = scroll.getVvalue() * (all - room);
-        double wanted = top;
-        if (bounds.getMinY() < top) {
-            wanted = bounds.getMinY();
-        } else if (bounds.getMaxY() > top + room) {
-            wanted = Math.min(bounds.getMinY(), bounds.getMaxY() - room);
+        int index = rows.indexOf(row);
+        double wanted = row.getBoundsInParent().getMinY();
+        if (row.getHeight() > room + 1) {
+            wanted = row.activeBox().map(box -> list.sceneToLocal(box.localToScene(box.getLayoutBounds())).getMinY())
+                    .orElse(wanted);
+        } else if (index > 0 && rows.get(index - 1).row().section().equals(row.row().section())) {
+            double before = rows.get(index - 1).getBoundsInParent().getMinY();
+            if (row.getBoundsInParent().getMaxY() - before <= room + 1) {
+                wanted = before;
+            }
         }
         scroll.setVvalue(Math.max(0, Math.min(1, wanted / (all - room))));
     }
 
-    private void caution() {
+    private void sayCaution() {
         String kind = active().flatMap(row -> row.row().field().head().caution())
                 .map(found -> found.code()).orElse("always");
         String state = model.beltStateProperty().get().map(now -> now.running() ? "running" : "isolated")

@@ -2,6 +2,7 @@ package bedmark.screen.zone;
 
 import bedmark.document.Node;
 import bedmark.document.Pointer;
+import bedmark.form.StationsField;
 import bedmark.quantity.Quality;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
@@ -78,6 +79,7 @@ final class RowView extends VBox {
         line.getStyleClass().add("row");
         cells.forEach(cell -> HBox.setHgrow(cell, Priority.ALWAYS));
         if (cells.size() == 2) {
+            cells.get(1).withGhostAbove();
             cells.get(0).getStyleClass().add("narrow");
             HBox.setHgrow(cells.get(0), Priority.NEVER);
         }
@@ -88,13 +90,26 @@ final class RowView extends VBox {
 
     private FieldBox box(Slot slot) {
         FieldBox box = new FieldBox(name() + ", " + words.label(slot), () -> model.activate(slot));
-        box.nameProperty().set(row.line().isPresent() && slot == row.slots().get(0)
-                ? wording.text("screen.zone.line", row.line().get(), words.label(slot)) : words.label(slot));
+        box.nameProperty().set(boxName(slot));
         box.setId("slot" + slot.where().toString().replace('/', '-'));
         if (!(slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot)) {
-            box.getStyleClass().add("words");
+            box.ofWords();
         }
         return box;
+    }
+
+    /** A narrow box has no room for more than the number of its line and one word. */
+    private String boxName(Slot slot) {
+        if (row.line().isEmpty() || slot != row.slots().get(0)) {
+            return words.label(slot);
+        }
+        return row.field() instanceof StationsField ? wording.text("screen.zone.station", row.line().get())
+                : wording.text("screen.zone.line", row.line().get(), words.label(slot));
+    }
+
+    /** The active box, where it is in this row. */
+    Optional<FieldBox> activeBox() {
+        return Optional.ofNullable(boxes.get(model.active().where()));
     }
 
     private QualityButton quality(Slot slot) {
@@ -132,7 +147,8 @@ final class RowView extends VBox {
             update(slot, boxes.get(slot.where()));
         }
         boolean here = row.slots().stream().anyMatch(slot -> slot.equals(model.active()));
-        Optional<ZoneModel.Note> note = here ? model.noteProperty().get() : Optional.empty();
+        Optional<ZoneModel.Note> note = here ? model.noteProperty().get()
+                : row.slots().stream().flatMap(slot -> model.impossible(slot).stream()).findFirst();
         message.setText(note.map(this::sentence).orElse(""));
         boolean wrong = note.filter(RowView::isWrong).isPresent();
         message.getStyleClass().setAll("message", wrong ? "wrong" : "questioned");
@@ -175,10 +191,7 @@ final class RowView extends VBox {
     }
 
     private Judgement judged(Slot slot, boolean active) {
-        if (!active) {
-            return Judgement.NONE;
-        }
-        return model.noteProperty().get().map(note -> isWrong(note) ? Judgement.WRONG : Judgement.QUESTIONED)
+        return (active ? model.noteProperty().get() : model.impossible(slot)).map(note -> isWrong(note) ? Judgement.WRONG : Judgement.QUESTIONED)
                 .orElse(Judgement.NONE);
     }
 
@@ -201,7 +214,7 @@ final class RowView extends VBox {
 
     /** Puts the focus on the active box, if it is in this row. */
     void focusActive() {
-        Optional.ofNullable(boxes.get(model.active().where())).ifPresent(FieldBox::requestFocus);
+        activeBox().ifPresent(FieldBox::requestFocus);
     }
 
     /** Whether the active cell is in this row. */

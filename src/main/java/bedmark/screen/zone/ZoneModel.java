@@ -10,22 +10,13 @@ import bedmark.form.Judgement;
 import bedmark.form.SpeedField;
 import bedmark.form.StationsField;
 import bedmark.quantity.BeltState;
-import bedmark.quantity.NumberEntry;
 import bedmark.quantity.Quality;
 import bedmark.quantity.Quantity;
-import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.TypedNumber;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
-import bedmark.survey.Act;
-import bedmark.survey.Entry;
-import bedmark.survey.QueueState;
 import bedmark.survey.Survey;
 import bedmark.survey.SurveyHistory;
-import java.math.BigDecimal;
-import java.math.MathContext;
-import java.time.OffsetDateTime;
-import java.time.temporal.ChronoUnit;
 import java.util.Comparator;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -35,14 +26,15 @@ import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
-import java.util.UUID;
 import java.util.stream.Stream;
+import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import javafx.beans.value.ObservableValue;
 
 /**
  * A transfer point under survey: which cell is active, what is typed into it, what the survey then says. What is typed
@@ -51,15 +43,11 @@ import javafx.beans.property.StringProperty;
  */
 public final class ZoneModel {
     private final ZoneSetting setting;
-    private final UUID id;
     private final Map<SpeedField, SpeedField.Way> ways = new HashMap<>();
     private final Map<Pointer, Unit> chosenUnits = new HashMap<>();
     private final Set<Pointer> believed = new HashSet<>();
-    private int pending;
-    private boolean undoWhenSaved;
-
-    private SurveyHistory history;
-    private final ReadOnlyObjectWrapper<Branch> saved;
+    private final SurveyInWork work;
+    private final BooleanBinding undoable;
     private final ReadOnlyObjectWrapper<Branch> survey;
     private final ReadOnlyObjectWrapper<List<SlotRow>> rows;
     private final ReadOnlyObjectWrapper<InHand> inHand = new ReadOnlyObjectWrapper<>();
@@ -105,23 +93,28 @@ public final class ZoneModel {
      */
     public ZoneModel(ZoneSetting setting, UnitSystem units, Locale locale) {
         this.setting = setting;
-        this.history = setting.history();
-        this.id = history.survey().id();
+        this.work = new SurveyInWork(setting.history(), setting.scribe(), setting.person());
         this.units.set(units);
         this.locale.set(locale);
-        this.saved = new ReadOnlyObjectWrapper<>(history.survey().document());
-        this.survey = new ReadOnlyObjectWrapper<>(saved.get());
+        this.survey = new ReadOnlyObjectWrapper<>(document());
         this.rows = new ReadOnlyObjectWrapper<>(layOut());
-        this.outcome = new ReadOnlyObjectWrapper<>(judge(saved.get()));
+        this.outcome = new ReadOnlyObjectWrapper<>(judge(document()));
+        work.documentProperty().addListener((property, before, now) -> refresh());
         typed.addListener((property, before, now) -> preview());
+        this.undoable = typed.isNotEmpty().or(work.undoableProperty());
         this.units.addListener((property, before, now) -> unitChanged());
         this.locale.addListener((property, before, now) -> preview());
         activate(firstToAnswer());
     }
 
+    /** The survey as it is saved, or on its way to be. */
+    private Branch document() {
+        return work.documentProperty().get();
+    }
+
     /** Where work begins: the first gap, or the first cell where there is none. */
     private Slot firstToAnswer() {
-        return setting.form().gaps(saved.get()).stream().filter(gap -> open())
+        return setting.form().gaps(document()).stream().filter(gap -> open())
                 .flatMap(gap -> slots().stream().filter(slot -> slot.field().equals(gap))).findFirst()
                 .orElseGet(() -> slots().get(0));
     }
@@ -161,6 +154,11 @@ public final class ZoneModel {
         return note.getReadOnlyProperty();
     }
 
+    /** Whether there is something that {@link #undo} takes back. */
+    public ObservableValue<Boolean> undoableProperty() {
+        return undoable;
+    }
+
     /** What is typed into the active cell; empty where nothing was typed since it became active. */
     public StringProperty typedProperty() {
         return typed;
@@ -180,7 +178,7 @@ public final class ZoneModel {
     }
 
     public SurveyHistory history() {
-        return history;
+        return work.history();
     }
 
     /** All cells in form order. */
@@ -199,13 +197,17 @@ public final class ZoneModel {
         return setting.last().flatMap(last -> last.at(slot.where()));
     }
 
-    /** Makes a cell active; what was typed into the one before is saved first. */
+    /** Makes a cell active; what was typed into the one before is saved first, and stays in hand where it cannot. */
     public void activate(Slot slot) {
-        keep();
-        show(slot);
+        show(keep() ? slot : active());
     }
 
     private void show(Slot slot) {
+        if (inHand.get() != null && slot.equals(active()) && !typed.get().isEmpty()) {
+            // A number that is not finished keeps its cell in hand, with the note that says why.
+            inHand.set(new InHand(slot, inHand.get().unit()));
+            return;
+        }
         typed.set("");
         inHand.set(new InHand(slot, unitOf(slot)));
         note.set(firstJudgement(slot));
@@ -272,13 +274,13 @@ public final class ZoneModel {
         if (typed.get().isEmpty() || !open()) {
             return true;
         }
-        Slot slot = active();
-        Optional<Node> answer = typedAnswer(slot);
-        if (answer.isEmpty()) {
+        Typing.Read read = read();
+        if (read.answer().isEmpty()) {
+            note.set(read.rejected().map(Note.NoNumber::new));
             return false;
         }
         String was = typed.get();
-        set(slot.where(), answer);
+        set(active().where(), read.answer());
         if (typed.get().equals(was)) {
             typed.set("");
         }
@@ -297,40 +299,16 @@ public final class ZoneModel {
 
     /** What stands in the active cell, as the pad edits it: the locale's decimal sign, no other signs. */
     public String editable() {
-        if (!typed.get().isEmpty()) {
-            return typed.get();
-        }
-        char sign = new QuantityFormat(locale.get()).decimalSign();
-        return answer(active()).map(node -> {
-            if (node instanceof Branch) {
-                return quantity(saved.get(), active().where()).map(read -> inUnit(read, sign)).orElse("");
-            }
-            return node instanceof Node.Decimal number ? number.value().toPlainString().replace('.', sign)
-                    : node instanceof Node.Text text ? text.value() : "";
-        }).orElse("");
-    }
-
-    private String inUnit(Quantity read, char sign) {
-        if (read.unit() == unit()) {
-            return read.entered().orElseGet(() -> read.value().toPlainString().replace('.', sign));
-        }
-        return unit().convert(read.value(), read.unit()).round(new MathContext(4)).stripTrailingZeros()
-                .toPlainString().replace('.', sign);
+        return typed.get().isEmpty() ? typing().editable(answer(active()), inHand.get().unit()) : typed.get();
     }
 
     /** Changes the number in the active cell by one step of its unit. */
     public void step(int direction) {
-        Slot slot = active();
-        BigDecimal step = slot instanceof Slot.MeasureSlot measured ? measured.measure().step(unit())
-                : slot instanceof Slot.CountSlot counted ? counted.count().step() : BigDecimal.ZERO;
-        String now = editable();
-        TypedNumber number = new NumberEntry(locale.get()).read(now.isEmpty() ? "0" : now);
-        if (number instanceof TypedNumber.Accepted accepted) {
-            BigDecimal stepped = accepted.value().add(step.multiply(BigDecimal.valueOf(direction)))
-                    .max(BigDecimal.ZERO);
-            char sign = new QuantityFormat(locale.get()).decimalSign();
-            typed.set(stepped.toPlainString().replace('.', sign));
-        }
+        typing().stepped(inHand.get(), editable(), direction).ifPresent(typed::set);
+    }
+
+    private Typing typing() {
+        return new Typing(locale.get(), setting.clock(), beltState.get());
     }
 
     /** Goes on to the next unit that the active cell can be typed in; what is typed is not converted. */
@@ -351,71 +329,36 @@ public final class ZoneModel {
 
     private void set(Pointer where, Optional<Node> answer) {
         believed.remove(where);
-        save(Answers.change(saved.get(), where, answer));
-    }
-
-    private void save(Answers.Change change) {
-        if (!open() || saved.get().at(change.where()).equals(change.answer())) {
-            return;
-        }
-        saved.set(change.in(saved.get()));
-        act(new Act.AnswerSet(id, change.where(), change.answer()));
-        refresh();
+        work.change(Answers.change(document(), where, answer));
     }
 
     /** Whether the survey still takes answers; a completed one is corrected by a new revision. */
     public boolean open() {
-        return history.state() == QueueState.OPEN;
-    }
-
-    private void act(Act act) {
-        pending++;
-        setting.scribe().save(setting.person(), act, this::noted);
-    }
-
-    private void noted(Entry entry) {
-        history = SurveyHistory.after(Optional.of(history), entry).orElseThrow();
-        pending--;
-        if (pending == 0 && undoWhenSaved) {
-            undoWhenSaved = false;
-            undo();
-        }
+        return work.open();
     }
 
     /** Takes back the typing, or else the newest change that still counts. */
     public void undo() {
         if (!typed.get().isEmpty()) {
             typed.set("");
-            return;
+        } else {
+            work.undo(this::activate);
         }
-        if (pending > 0) {
-            undoWhenSaved = true;
-            return;
-        }
-        history.newest().ifPresent(change -> {
-            pending++;
-            setting.scribe().save(setting.person(), new Act.AnswerUndone(id, change.sequence()), entry -> {
-                noted(entry);
-                saved.set(history.survey().document());
-                refresh();
-                activate(change.where());
-            });
-        });
     }
 
     /** Adds a station or a segment behind the last one of a table and makes it active. */
     public void addLine(Pointer table) {
         keep();
-        int lines = saved.get().at(table).filter(Node.Series.class::isInstance)
+        int lines = document().at(table).filter(Node.Series.class::isInstance)
                 .map(node -> ((Node.Series) node).items().size()).orElse(0);
-        save(Answers.withLine(saved.get(), table, Branch.EMPTY));
+        work.change(Answers.withLine(document(), table, Branch.EMPTY));
         activate(table.child(lines));
     }
 
     /** Takes a line out of a table. */
     public void removeLine(Pointer line) {
         typed.set("");
-        save(Answers.withoutLine(saved.get(), line));
+        work.change(Answers.withoutLine(document(), line));
         activate(new Pointer(line.tokens().subList(0, line.tokens().size() - 1)));
     }
 
@@ -428,21 +371,21 @@ public final class ZoneModel {
     public void pull(int line, Quantity position, Quantity depth) {
         Pointer table = Survey.READINGS.child(StationsField.KEY);
         typed.set("");
-        save(pulled(line, position, depth));
+        work.change(pulled(line, position, depth));
         activate(table.child(line).child("depth"));
     }
 
     /** The survey as it would be with the bed pulled to a depth; nothing is saved. */
     public Branch previewPull(int line, Quantity position, Quantity depth) {
-        return pulled(line, position, depth).in(saved.get());
+        return pulled(line, position, depth).in(document());
     }
 
     private Answers.Change pulled(int line, Quantity position, Quantity depth) {
         Pointer table = Survey.READINGS.child(StationsField.KEY);
-        Branch seen = Branch.write(stamped(depth).withQuality(Quality.ESTIMATED));
-        return saved.get().at(table.child(line)).isPresent()
-                ? Answers.change(saved.get(), table.child(line).child("depth"), Optional.of(seen))
-                : Answers.withLine(saved.get(), table, Branch.EMPTY.with("position", position).with("depth", seen));
+        Branch seen = Branch.write(typing().stamped(depth).withQuality(Quality.ESTIMATED));
+        return document().at(table.child(line)).isPresent()
+                ? Answers.change(document(), table.child(line).child("depth"), Optional.of(seen))
+                : Answers.withLine(document(), table, Branch.EMPTY.with("position", position).with("depth", seen));
     }
 
     private void chooseWay(SpeedField field, Optional<Node> answer) {
@@ -451,8 +394,8 @@ public final class ZoneModel {
         chosen.ifPresent(way -> {
             ways.put(field, way);
             for (SpeedField.Way other : SpeedField.Way.values()) {
-                if (other != way && saved.get().at(other.where()).isPresent()) {
-                    save(new Answers.Change(other.where(), Optional.empty()));
+                if (other != way && document().at(other.where()).isPresent()) {
+                    work.change(new Answers.Change(other.where(), Optional.empty()));
                 }
             }
             refresh();
@@ -474,10 +417,10 @@ public final class ZoneModel {
     public void mark(Quality quality) {
         Slot slot = active();
         keep();
-        Optional<Quantity> reading = quantity(saved.get(), slot.where());
+        Optional<Quantity> reading = quantity(document(), slot.where());
         boolean running = beltState.get().or(() -> reading.flatMap(Quantity::beltState))
                 .map(BeltState::running).orElse(true);
-        if (isDepth(slot) && quality == Quality.MEASURED && running) {
+        if (Typing.isDepth(slot) && quality == Quality.MEASURED && running) {
             note.set(Optional.of(new Note.IsolateFirst()));
             return;
         }
@@ -505,7 +448,7 @@ public final class ZoneModel {
             return Optional.empty();
         }
         return Optional.ofNullable(chosenUnits.get(slot.where()))
-                .or(() -> quantity(saved.get(), slot.where()).map(Quantity::unit)
+                .or(() -> quantity(document(), slot.where()).map(Quantity::unit)
                         .filter(measured.measure().units()::contains))
                 .or(() -> Optional.of(measured.measure().unit(units.get())));
     }
@@ -521,18 +464,26 @@ public final class ZoneModel {
     }
 
     private List<SlotRow> layOut() {
-        return Slots.rows(setting.form(), saved.get(), field -> field.ways(saved.get()).stream().findFirst()
+        return Slots.rows(setting.form(), document(), field -> field.ways(document()).stream().findFirst()
                 .orElseGet(() -> ways.getOrDefault(field, SpeedField.Way.DIRECT)));
     }
 
     private void preview() {
-        Branch now = typed.get().isEmpty() ? saved.get()
-                : typedAnswer(active()).map(answer -> Answers.change(saved.get(), active().where(), Optional.of(answer))
-                        .in(saved.get())).orElse(saved.get());
+        Typing.Read read = read();
+        note.set(read.rejected().filter(reason -> reason != TypedNumber.Reason.UNFINISHED)
+                .<Note>map(Note.NoNumber::new).or(() -> typed.get().isEmpty() ? note.get() : Optional.empty()));
+        Branch now = read.answer().map(answer -> Answers.change(document(), active().where(), Optional.of(answer))
+                .in(document())).orElseGet(this::document);
         if (!Objects.equals(survey.get(), now)) {
             survey.set(now);
             outcome.set(judge(now));
         }
+    }
+
+    /** What the typing comes to; nothing while nothing is typed. */
+    private Typing.Read read() {
+        return typed.get().isEmpty() ? Typing.Read.NOTHING
+                : typing().read(inHand.get(), typed.get(), quantity(document(), active().where()));
     }
 
     private Outcome judge(Branch document) {
@@ -544,45 +495,6 @@ public final class ZoneModel {
         }
     }
 
-    private Optional<Node> typedAnswer(Slot slot) {
-        if (slot instanceof Slot.TextSlot) {
-            return Optional.of(Node.text(typed.get()));
-        }
-        NumberEntry entry = new NumberEntry(locale.get());
-        TypedNumber number = slot instanceof Slot.MeasureSlot ? entry.read(typed.get(), unit())
-                : entry.read(typed.get());
-        if (number instanceof TypedNumber.Rejected rejected) {
-            boolean halfway = rejected.reason() == TypedNumber.Reason.UNFINISHED;
-            note.set(halfway ? Optional.empty() : Optional.of(new Note.NoNumber(rejected.reason())));
-            return Optional.empty();
-        }
-        note.set(Optional.empty());
-        TypedNumber.Accepted accepted = (TypedNumber.Accepted) number;
-        if (slot instanceof Slot.MeasureSlot measured) {
-            Quantity quantity = accepted.in(unit());
-            return Optional.of(Branch.write(measured.markable() ? marked(slot, stamped(quantity)) : quantity));
-        }
-        return Optional.of(Node.number(accepted.value()));
-    }
-
-    private Quantity stamped(Quantity quantity) {
-        Quantity timed = quantity.readAt(OffsetDateTime.now(setting.clock()).truncatedTo(ChronoUnit.SECONDS));
-        return beltState.get().map(timed::withBeltState).orElse(timed);
-    }
-
-    /** A depth starts as estimated unless the belt is isolated; other readings start as measured. */
-    private Quantity marked(Slot slot, Quantity quantity) {
-        boolean isolated = beltState.get().filter(state -> !state.running()).isPresent();
-        Quality start = isDepth(slot) && !isolated ? Quality.ESTIMATED : Quality.MEASURED;
-        Quality kept = quantity(saved.get(), slot.where()).flatMap(Quantity::quality)
-                .filter(quality -> quality == Quality.SUSPECT).orElse(start);
-        return quantity.withQuality(kept);
-    }
-
-    private static boolean isDepth(Slot slot) {
-        return slot.field() instanceof StationsField && slot.where().last().equals("depth");
-    }
-
     private static Optional<Quantity> quantity(Branch document, Pointer where) {
         try {
             return document.at(where).filter(Branch.class::isInstance).map(node -> ((Branch) node).asQuantity());
@@ -591,9 +503,14 @@ public final class ZoneModel {
         }
     }
 
+    /** What is impossible about the answer of a cell, active or not: it stands until it is mended. */
+    public Optional<Note> impossible(Slot slot) {
+        return firstJudgement(slot).filter(note -> !isDoubt(note));
+    }
+
     /** What there is to say about the answer of a cell, as it is saved: an impossibility before a doubt. */
     private Optional<Note> firstJudgement(Slot slot) {
-        return slot.field().judge(saved.get(), setting.last().orElse(Branch.EMPTY)).stream()
+        return slot.field().judge(document(), setting.last().orElse(Branch.EMPTY)).stream()
                 .filter(judgement -> judgement.where().holds(slot.where()) || slot.where().holds(judgement.where()))
                 .min(Comparator.comparing(judgement -> judgement instanceof Judgement.Doubt))
                 .map(judgement -> new Note.Judged(judgement, slot.field()));
@@ -609,20 +526,20 @@ public final class ZoneModel {
         if (!keep()) {
             return false;
         }
-        List<Judgement.Refusal> refusals = setting.form().refusals(saved.get());
+        List<Judgement.Refusal> refusals = setting.form().refusals(document());
         if (!refusals.isEmpty()) {
             activate(refusals.get(0).where());
             setting.form().fieldAt(refusals.get(0).where()).ifPresent(field ->
                     note.set(Optional.of(new Note.Judged(refusals.get(0), field))));
             return false;
         }
-        Optional<Field> gap = setting.form().gaps(saved.get()).stream().findFirst().or(this::engineGap);
+        Optional<Field> gap = setting.form().gaps(document()).stream().findFirst().or(this::engineGap);
         if (gap.isPresent()) {
             activate(gap.get().where());
             note.set(Optional.of(new Note.Gap(gap.get())));
             return false;
         }
-        act(new Act.SurveyCompleted(id, signedOffBy));
+        work.complete(signedOffBy);
         return true;
     }
 

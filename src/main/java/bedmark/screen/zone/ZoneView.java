@@ -4,6 +4,7 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.engine.Assessment;
+import bedmark.engine.verdict.Level;
 import bedmark.form.StationsField;
 import bedmark.picture.Snap;
 import bedmark.picture.ZoneSketch;
@@ -27,6 +28,7 @@ import bedmark.screen.round.RoundModel;
 import bedmark.screen.round.RoundRow;
 import bedmark.screen.round.Ticks;
 import bedmark.screen.theme.Density;
+import bedmark.screen.theme.Hand;
 import bedmark.screen.theme.Icon;
 import bedmark.screen.theme.LevelShape;
 import bedmark.survey.Register;
@@ -38,6 +40,7 @@ import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.layout.BorderPane;
@@ -63,6 +66,8 @@ public final class ZoneView implements Screen {
     private final BorderPane body = new BorderPane();
     private final VBox head;
     private final javafx.scene.Node foot;
+    private final boolean gloved;
+    private boolean large;
     private Optional<Branch> pulled = Optional.empty();
 
     public ZoneView(Workplace workplace, ZoneModel model, RoundModel round, Navigator navigator, Density density) {
@@ -70,6 +75,7 @@ public final class ZoneView implements Screen {
         this.model = model;
         this.round = round;
         this.navigator = navigator;
+        this.gloved = density.hand() == Hand.GLOVED;
         this.wording = workplace.wording();
         model.unitsProperty().set(wording.units());
         model.localeProperty().set(wording.words().locale());
@@ -151,12 +157,18 @@ public final class ZoneView implements Screen {
         model.outcomeProperty().get().assessment().ifPresent(found -> {
             RulesPane rules = new RulesPane(found, wording, model.setting().form(), this::hideRules);
             result.getChildren().setAll(rules);
+            if (large) {
+                result.getChildren().add(0, form.caution());
+            }
             VBox.setVgrow(rules, Priority.ALWAYS);
         });
     }
 
     private void hideRules() {
         result.getChildren().setAll(picture, verdict);
+        if (large) {
+            result.getChildren().add(0, form.caution());
+        }
     }
 
     private FootBar footBar() {
@@ -184,10 +196,16 @@ public final class ZoneView implements Screen {
         return new FootBar(Optional.of(back), Optional.of(middle), Optional.of(onward));
     }
 
+    /** Puts the focus where the active cell is filled in: into its box, or into the text below it. */
+    private void focusActive() {
+        form.focusActive();
+        entry.focusText();
+    }
+
     /** Completes this survey and goes on, or stays at the first gap. */
     private void onward(Optional<RoundRow> next) {
         if (model.open() && !model.complete(workplace.preferences().person())) {
-            form.focusActive();
+            focusActive();
             return;
         }
         next.ifPresentOrElse(row -> navigator.toZone(round, row), () -> navigator.toRound(round));
@@ -221,6 +239,10 @@ public final class ZoneView implements Screen {
     private Verdict verdict(Assessment found) {
         Told told = new Telling(wording, model.setting().form()).tell(found);
         List<String> advice = new ArrayList<>();
+        if (found.level() == Level.INCOMPLETE && !found.missingRequired().isEmpty()) {
+            advice.add(wording.text("screen.zone.still-to-read", found.missingRequired().stream()
+                    .map(name -> wording.reading(name, model.setting().form())).collect(Collectors.joining(" \u00B7 "))));
+        }
         told.repeat().ifPresent(advice::add);
         told.action().ifPresent(advice::add);
         told.atDesign().ifPresent(advice::add);
@@ -313,12 +335,17 @@ public final class ZoneView implements Screen {
             body.setLeft(work);
             body.setCenter(result);
         }
-        form.focusActive();
+        entry.turned(portrait);
+        large = gloved && !portrait;
+        result.getChildren().remove(form.caution());
+        form.shrink(large);
+        hideRules();
+        focusActive();
     }
 
     @Override
     public void shown() {
-        form.focusActive();
+        focusActive();
     }
 
     @Override

@@ -13,6 +13,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import javafx.beans.property.SimpleBooleanProperty;
 import javafx.event.Event;
 import javafx.scene.Node;
 import javafx.scene.Scene;
@@ -35,7 +36,7 @@ class NumericPadTest {
     @Test
     void everyKeyIsThereAndNamed() throws Exception {
         Glass.on(() -> {
-            NumericPad pad = new NumericPad(model, Samples.WORDS);
+            NumericPad pad = new NumericPad(model, Samples.WORDS, new SimpleBooleanProperty(true));
             model.open(Samples.INCHES, "");
             for (PadKey key : PadKey.values()) {
                 assertFalse(key(pad, key).getAccessibleText().isBlank(), key.name());
@@ -51,7 +52,7 @@ class NumericPadTest {
     @Test
     void pressedKeysType() throws Exception {
         Glass.on(() -> {
-            NumericPad pad = new NumericPad(model, Samples.WORDS);
+            NumericPad pad = new NumericPad(model, Samples.WORDS, new SimpleBooleanProperty(true));
             model.open(Samples.INCHES, "");
             key(pad, PadKey.DIGIT_9).fire();
             key(pad, PadKey.FRACTION).fire();
@@ -65,7 +66,7 @@ class NumericPadTest {
     @Test
     void refusalIsSeen() throws Exception {
         Glass.on(() -> {
-            NumericPad pad = new NumericPad(model, Samples.WORDS);
+            NumericPad pad = new NumericPad(model, Samples.WORDS, new SimpleBooleanProperty(true));
             model.open(Samples.MILLIMETRES, "");
             Label note = (Label) pad.lookup(".pad-note");
             assertFalse(note.isVisible());
@@ -81,7 +82,7 @@ class NumericPadTest {
     void keysAreAsLargeAsTheHandNeeds() throws Exception {
         Glass.on(() -> {
             for (Hand hand : Hand.values()) {
-                NumericPad pad = new NumericPad(model, Samples.WORDS);
+                NumericPad pad = new NumericPad(model, Samples.WORDS, new SimpleBooleanProperty(true));
                 model.open(Samples.INCHES, "");
                 Density density = new Density(149, hand);
                 Scene scene = Glass.show(new VBox(pad), Light.DAY, density, 439, 700);

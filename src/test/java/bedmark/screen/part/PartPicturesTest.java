@@ -25,6 +25,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import javafx.beans.property.SimpleBooleanProperty;
 import javafx.geometry.Bounds;
 import javafx.geometry.Insets;
 import javafx.geometry.Pos;
@@ -62,7 +63,7 @@ class PartPicturesTest {
 
     private static NumericPad pad(PadSetup setup, String text, PadKey... keys) {
         PadModel model = new PadModel(command -> { });
-        NumericPad pad = new NumericPad(model, Samples.WORDS);
+        NumericPad pad = new NumericPad(model, Samples.WORDS, new SimpleBooleanProperty(true));
         model.open(setup, text);
         for (PadKey key : keys) {
             model.press(key);

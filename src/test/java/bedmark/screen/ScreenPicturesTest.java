@@ -1,0 +1,222 @@
+package bedmark.screen;
+
+import bedmark.screen.start.StartModel;
+import bedmark.screen.start.StartView;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.Clock;
+import java.time.Instant;
+import java.time.ZoneOffset;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import javafx.scene.control.TextInputControl;
+import javafx.scene.input.KeyCode;
+import javafx.scene.layout.BorderPane;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** Takes the pictures of every screen that {@code src/site/screens} shows, in both orientations. */
+class ScreenPicturesTest {
+    private static final Path PICTURES = Path.of("src", "site", "screens");
+    private static final Path STICK = Path.of("target", "usb-stick");
+    private static final Clock CLOCK = Clock.fixed(Instant.parse("2026-09-22T14:20:00Z"), ZoneOffset.ofHours(2));
+    private static final Locale SPANISH = Locale.forLanguageTag("es");
+
+    @TempDir
+    private Path temp;
+
+    private TabletApp app;
+    private String orientation;
+
+    @Test
+    void landscape() throws Exception {
+        walk("landscape", 1280, 800, Locale.ENGLISH, false);
+    }
+
+    @Test
+    void portrait() throws Exception {
+        walk("portrait", 800, 1280, SPANISH, true);
+    }
+
+    private void walk(String named, double width, double height, Locale language, boolean night) throws Exception {
+        orientation = named;
+        Files.createDirectories(STICK);
+        try (TabletApp opened = new TabletApp(temp.resolve("store"), Optional.of(Path.of("sample-surveys")), STICK,
+                CLOCK, width, height)) {
+            app = opened;
+            prefer(language, night, false);
+            start();
+            round();
+            freshZone(language);
+            overloadedZone();
+            otherZones();
+            queue();
+        }
+    }
+
+    private void start() throws Exception {
+        take("empty");
+        loading();
+        app.click("load-demo");
+        app.until(() -> app.has("person"));
+        app.click("person");
+        app.type("A. Vale");
+        app.click("caution-read");
+        takeAll("start");
+    }
+
+    /** Loading is over before a picture can be taken, so that the screen is shown with a model that stands still. */
+    private void loading() throws Exception {
+        Glass.on(() -> {
+            StartModel model = new StartModel(app.workplace());
+            model.loadingProperty().set(0.4);
+            StartView view = new StartView(app.workplace(), model, app.shell());
+            view.turned(orientation.equals("portrait"));
+            BorderPane root = (BorderPane) app.shell().scene().getRoot();
+            root.setTop(view.head());
+            root.setCenter(view.body());
+            root.setBottom(view.foot());
+            return null;
+        });
+        take("loading");
+        Glass.on(() -> {
+            app.shell().toStart();
+            return null;
+        });
+        app.settle();
+    }
+
+    private void round() throws Exception {
+        app.click("start-walk");
+        app.until(() -> app.has("search"));
+        takeAll("round");
+        app.click("search");
+        app.type("bunker");
+        take("round-searched");
+        app.click("skip-TP-19");
+        take("round-skip");
+        app.click("reason-cancel");
+        app.click("search");
+        app.press(KeyCode.CONTROL, KeyCode.A);
+        app.press(KeyCode.DELETE);
+    }
+
+    private void freshZone(Locale language) throws Exception {
+        open("TP-19");
+        takeAll("zone-fresh");
+        app.click("foot-done");
+        take("zone-gap");
+        app.type("0");
+        app.press(KeyCode.ENTER);
+        app.press(KeyCode.SHIFT, KeyCode.ENTER);
+        take("zone-refused");
+        app.type("98");
+        app.press(KeyCode.ENTER);
+        take("zone-doubt");
+        app.type(language.equals(SPANISH) ? "5,2" : "5.2");
+        app.click("pad-decimal");
+        take("zone-length");
+        app.press(KeyCode.ENTER);
+        app.click("slot-readings-skirtSpacing");
+        app.click("slot-readings-beltSpeed-way");
+        take("zone-speed");
+        app.click("belt-state");
+        take("zone-belt-state");
+        app.click("belt-running-loaded");
+        app.click("slot-permit");
+        app.type("LOTO 4417");
+        take("zone-text");
+        app.click("foot-round");
+        app.until(() -> app.has("search"));
+    }
+
+    private void overloadedZone() throws Exception {
+        open("TP-08");
+        take("zone-completed");
+        app.click("correct");
+        app.until(() -> !app.has("correct"));
+        app.click("slot-readings-bedDepths-2-depth");
+        takeAll("zone-overloaded");
+        gloves("zone-overloaded");
+        app.click("every-rule");
+        take("zone-rules");
+        app.click("rules-close");
+        app.click("slot-readings-seals-0-type");
+        take("zone-seals");
+        app.click("foot-round");
+        app.until(() -> app.has("search"));
+    }
+
+    private void otherZones() throws Exception {
+        open("TP-05");
+        take("zone-undecided");
+        app.click("foot-round");
+        open("TP-18");
+        take("zone-incomplete");
+        app.click("foot-round");
+    }
+
+    private void queue() throws Exception {
+        app.click("to-queue");
+        takeAll("queue");
+        app.click("queue-all");
+        app.exportsTo(Path.of("/media/usb-stick"));
+        app.click("export");
+        app.until(() -> app.has("trouble"));
+        take("export-failed");
+        app.exportsTo(STICK);
+        app.click("export");
+        app.until(() -> app.has("receipt"));
+        take("export-receipt");
+        for (Path pack : Files.list(STICK).toList()) {
+            Files.delete(pack);
+        }
+        Files.delete(STICK);
+    }
+
+    private void open(String tag) throws Exception {
+        app.click("stop-" + tag);
+        app.until(() -> app.has("verdict"));
+    }
+
+    private void prefer(Locale language, boolean night, boolean gloves) throws Exception {
+        Glass.on(() -> {
+            Preferences now = app.workplace().preferences();
+            app.workplace().preferencesProperty().set(now.withLocale(language).withNight(night).withGloves(gloves));
+            return null;
+        });
+        app.settle();
+    }
+
+    /** A screen in both lights and both languages. */
+    private void takeAll(String name) throws Exception {
+        Preferences before = app.workplace().preferences();
+        for (Locale language : List.of(Locale.ENGLISH, SPANISH)) {
+            for (boolean night : List.of(false, true)) {
+                prefer(language, night, false);
+                take(name);
+            }
+        }
+        prefer(before.locale(), before.night(), before.gloves());
+    }
+
+    private void gloves(String name) throws Exception {
+        Preferences before = app.workplace().preferences();
+        prefer(before.locale(), before.night(), true);
+        take(name);
+        prefer(before.locale(), before.night(), false);
+    }
+
+    private void take(String name) throws Exception {
+        Glass.on(() -> {
+            // A caret that blinks would make every second picture another one.
+            app.shell().scene().getRoot().lookupAll(".text-input").forEach(node ->
+                    ((TextInputControl) node).setStyle("-fx-display-caret: false;"));
+            return null;
+        });
+        Preferences now = app.workplace().preferences();
+        app.picture(PICTURES.resolve(name + "-" + orientation + (now.night() ? "-night" : "-day")
+                + "-" + now.locale().getLanguage() + (now.gloves() ? "-gloved" : "") + ".png"));
+    }
+}

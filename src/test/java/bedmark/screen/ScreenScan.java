@@ -1,0 +1,141 @@
+package bedmark.screen;
+
+import bedmark.screen.part.FieldBox;
+import bedmark.screen.theme.Density;
+import bedmark.screen.theme.Hand;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import javafx.geometry.Bounds;
+import javafx.scene.Node;
+import javafx.scene.Parent;
+import javafx.scene.Scene;
+import javafx.scene.control.ButtonBase;
+import javafx.scene.control.Control;
+import javafx.scene.control.Label;
+import javafx.scene.control.Labeled;
+import javafx.scene.control.TextInputControl;
+import javafx.scene.control.ContentDisplay;
+import javafx.scene.text.Text;
+
+/** Looks through everything that a scene shows, for what a hand cannot hit, an eye cannot read or an ear not hear. */
+final class ScreenScan {
+    private static final double SLACK = 1;
+
+    private final Scene scene;
+    private final Density bare;
+    private final Density density;
+    private final List<String> findings = new ArrayList<>();
+
+    private ScreenScan(Scene scene, Density density) {
+        this.scene = scene;
+        this.density = density;
+        this.bare = new Density(density.dpi(), Hand.BARE);
+    }
+
+    /** What is wrong with a scene, in words; called on the screen's thread. */
+    static List<String> of(Scene scene, Density density) {
+        scene.getRoot().applyCss();
+        scene.getRoot().layout();
+        ScreenScan scan = new ScreenScan(scene, density);
+        scan.look(scene.getRoot());
+        return scan.findings;
+    }
+
+    /** Whether the caution stands on the screen. */
+    static boolean hasCaution(Scene scene) {
+        return scene.getRoot().lookupAll(".caution").stream().anyMatch(node -> shown(node)
+                && node.getLayoutBounds().getHeight() > 0 && node.lookupAll(".words").stream()
+                .anyMatch(words -> !((Label) words).getText().isBlank()));
+    }
+
+    private static boolean shown(Node node) {
+        return node.isVisible() && (node.getParent() == null || shown(node.getParent()));
+    }
+
+    private void look(Node node) {
+        if (!node.isVisible()) {
+            return;
+        }
+        target(node);
+        focus(node);
+        if (node instanceof Labeled labeled) {
+            whole(labeled);
+        }
+        if (node instanceof Parent parent) {
+            apart(parent);
+            parent.getChildrenUnmodifiable().forEach(this::look);
+        }
+    }
+
+    private void target(Node node) {
+        if (!(node instanceof ButtonBase || node instanceof FieldBox || node instanceof TextInputControl)
+                || node.getStyleClass().contains("arrow-button")) {
+            return;
+        }
+        double least = node.getStyleClass().contains("secondary-target") ? bare.secondary()
+                : node.getStyleClass().contains("pad-key") ? density.target() : bare.target();
+        double height = node.getLayoutBounds().getHeight();
+        if (height < least - 0.01) {
+            findings.add("too low: " + name(node) + " has " + height + " px of " + least);
+        }
+    }
+
+    private void focus(Node node) {
+        if (node.isFocusTraversable() && !node.isDisabled() && node.getAccessibleText() == null
+                && !(node instanceof Labeled labeled && labeled.getText() != null && !labeled.getText().isBlank())) {
+            findings.add("no name: " + name(node));
+        }
+    }
+
+    private void whole(Labeled labeled) {
+        if (labeled.getText() == null || labeled.getText().isEmpty()
+                || labeled.getContentDisplay() == ContentDisplay.GRAPHIC_ONLY) {
+            return;
+        }
+        if (!(labeled.lookup(".text") instanceof Text text)) {
+            return;
+        }
+        if (!bare(text.getText()).equals(bare(labeled.getText()))) {
+            findings.add("cut: " + labeled.getText() + " is shown as " + text.getText());
+        }
+        Bounds inner = text.localToScene(text.getLayoutBounds());
+        Bounds outer = labeled.localToScene(labeled.getLayoutBounds());
+        if (inner.getMinX() < outer.getMinX() - SLACK || inner.getMaxX() > outer.getMaxX() + SLACK
+                || inner.getMinY() < outer.getMinY() - 3 * SLACK || inner.getMaxY() > outer.getMaxY() + 3 * SLACK) {
+            findings.add("cut: " + labeled.getText() + " leaves its box");
+        }
+        if (outer.getMinX() < -SLACK || outer.getMaxX() > scene.getWidth() + SLACK) {
+            findings.add("cut: " + labeled.getText() + " leaves the glass");
+        }
+    }
+
+    private static String bare(String text) {
+        return text.replaceAll("\\s", "");
+    }
+
+    /** Texts of one parent do not lie over each other. */
+    private void apart(Parent parent) {
+        List<Node> texts = parent.getChildrenUnmodifiable().stream().filter(node -> node.isVisible()
+                && (node instanceof Label label && !label.getText().isEmpty() || node instanceof ButtonBase
+                || node instanceof FieldBox)).toList();
+        for (int i = 0; i < texts.size(); i++) {
+            for (int j = i + 1; j < texts.size(); j++) {
+                if (overlap(texts.get(i).getBoundsInParent(), texts.get(j).getBoundsInParent())) {
+                    findings.add("over each other: " + name(texts.get(i)) + " and " + name(texts.get(j)));
+                }
+            }
+        }
+    }
+
+    private static boolean overlap(Bounds one, Bounds other) {
+        return one.getMinX() + SLACK < other.getMaxX() && other.getMinX() + SLACK < one.getMaxX()
+                && one.getMinY() + SLACK < other.getMaxY() && other.getMinY() + SLACK < one.getMaxY();
+    }
+
+    private static String name(Node node) {
+        String text = node instanceof Labeled labeled ? labeled.getText() : node.getAccessibleText();
+        return node.getClass().getSimpleName() + Optional.ofNullable(node.getId()).map(id -> " #" + id).orElse("")
+                + " " + node.getStyleClass() + " " + (node instanceof Control || text != null ? text : "");
+    }
+}

@@ -122,8 +122,8 @@ class SchemasTest {
         assertEquals(types, words("bundle", "/$defs/sealRate/properties/type/enum"));
         assertEquals(conditions, words("bundle", "/$defs/sealRate/properties/condition/enum"));
         assertEquals(codes(DepthMethod.values(), DepthMethod::code), words("bundle", "/$defs/depthMethod/enum"));
-        assertTrue(words("bundle", "/$defs/plant/properties/method/enum").containsAll(drags));
-        assertTrue(words("assessment", "/$defs/assessment/properties/method/enum").containsAll(drags));
+        assertEquals(drags, words("bundle", "/$defs/plant/properties/method/enum"));
+        assertEquals(drags, words("assessment", "/$defs/assessment/properties/method/enum"));
         assertEquals(codes(Stream.of(Instrument.values()).filter(one -> one != Instrument.EXACT)
                         .toArray(Instrument[]::new), Instrument::code),
                 words("bundle", "/$defs/instrument/properties/kind/enum"));
@@ -146,9 +146,8 @@ class SchemasTest {
     @Test
     void everyRuleHasItsLimitsInTheBundle() {
         Branch limits = (Branch) schema("bundle").at(Pointer.parse("/$defs/limits/properties")).orElseThrow();
-        Set<String> others = Set.of("certainty", "beltGrip", "boardGrip");
         assertEquals(codes(Rule.values(), Rule::code), limits.members().keySet().stream()
-                .filter(key -> !others.contains(key)).collect(Collectors.toSet()));
+                .filter(key -> key.contains("-")).collect(Collectors.toSet()), "only a rule's code has hyphens");
     }
 
     private static <T> Set<String> codes(T[] values, Function<T, String> code) {

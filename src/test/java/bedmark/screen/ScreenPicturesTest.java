@@ -104,7 +104,7 @@ class ScreenPicturesTest {
 
     private void freshZone(Locale language) throws Exception {
         open("TP-19");
-        takeAll("zone-fresh");
+        take("zone-fresh");
         app.click("foot-done");
         take("zone-gap");
         app.type("0");

@@ -16,6 +16,9 @@ import javafx.scene.control.Label;
 import javafx.scene.control.Labeled;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.control.ContentDisplay;
+import javafx.scene.layout.BackgroundFill;
+import javafx.scene.layout.Region;
+import javafx.scene.paint.Color;
 import javafx.scene.text.Text;
 
 /** Looks through everything that a scene shows, for what a hand cannot hit, an eye cannot read or an ear not hear. */
@@ -61,6 +64,7 @@ final class ScreenScan {
         focus(node);
         if (node instanceof Labeled labeled) {
             whole(labeled);
+            contrast(labeled);
         }
         if (node instanceof Parent parent) {
             apart(parent);
@@ -108,6 +112,43 @@ final class ScreenScan {
         if (outer.getMinX() < -SLACK || outer.getMaxX() > scene.getWidth() + SLACK) {
             findings.add("cut: " + labeled.getText() + " leaves the glass");
         }
+    }
+
+    /** Text stands out from what it stands on by 7 to 1; a control that does nothing now may be fainter. */
+    private void contrast(Labeled labeled) {
+        if (labeled.getText() == null || labeled.getText().isBlank() || labeled.isDisabled()
+                || !(labeled.getTextFill() instanceof Color ink)) {
+            return;
+        }
+        ground(labeled).filter(ground -> contrast(ink, ground) < 7).ifPresent(ground ->
+                findings.add("too faint: " + name(labeled) + " " + ink + " on " + ground));
+    }
+
+    private static Optional<Color> ground(Node node) {
+        for (Node at = node; at != null; at = at.getParent()) {
+            if (at instanceof Region region && region.getBackground() != null
+                    && !region.getBackground().getFills().isEmpty()) {
+                List<BackgroundFill> fills = region.getBackground().getFills();
+                if (fills.get(fills.size() - 1).getFill() instanceof Color colour && colour.isOpaque()) {
+                    return Optional.of(colour);
+                }
+            }
+        }
+        return Optional.empty();
+    }
+
+    private static double contrast(Color one, Color other) {
+        double lighter = Math.max(luminance(one), luminance(other));
+        double darker = Math.min(luminance(one), luminance(other));
+        return (lighter + 0.05) / (darker + 0.05);
+    }
+
+    private static double luminance(Color colour) {
+        return 0.2126 * linear(colour.getRed()) + 0.7152 * linear(colour.getGreen()) + 0.0722 * linear(colour.getBlue());
+    }
+
+    private static double linear(double share) {
+        return share <= 0.03928 ? share / 12.92 : Math.pow((share + 0.055) / 1.055, 2.4);
     }
 
     private static String bare(String text) {

@@ -17,6 +17,7 @@ import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.input.KeyCode;
 import javafx.scene.layout.Pane;
 import javafx.scene.layout.Region;
 import org.junit.jupiter.api.Test;
@@ -65,10 +66,19 @@ class ScreenScanTest {
             app.click("stop-TP-19");
             app.until(() -> app.has("verdict"));
             scan("fresh", true);
+            app.click("foot-done");
+            scan("gap", true);
+            app.type("98");
+            app.press(KeyCode.ENTER);
+            scan("doubt", true);
             app.click("slot-permit");
             scan("text", true);
             app.click("slot-readings-beltSpeed-way");
             scan("choice", true);
+            app.click("foot-round");
+            app.click("stop-TP-05");
+            app.until(() -> app.has("verdict"));
+            scan("undecided", true);
             app.click("foot-round");
             app.click("stop-TP-08");
             app.until(() -> app.has("verdict"));
@@ -77,11 +87,17 @@ class ScreenScanTest {
             app.until(() -> !app.has("correct"));
             app.click("slot-readings-bedDepths-2-depth");
             scan("depth", true);
+            app.click("every-rule");
+            scan("rules", true);
             app.click("slot-readings-seals-0-type");
             scan("seals", true);
             app.click("foot-round");
             app.click("to-queue");
             scan("queue", false);
+            app.click("queue-all");
+            app.click("export");
+            app.until(() -> app.has("receipt"));
+            scan("receipt", false);
         }
         assertEquals(List.of(), findings);
     }
@@ -156,6 +172,13 @@ class ScreenScanTest {
         Region nameless = Glass.on(Region::new);
         nameless.setFocusTraversable(true);
         assertFound("no name", scanOf(nameless));
+    }
+
+    @Test
+    void scanFindsATextThatIsTooFaint() throws Exception {
+        Label faint = Glass.on(() -> new Label("faint"));
+        faint.setStyle("-fx-text-fill: #999999;");
+        assertFound("too faint", scanOf(faint));
     }
 
     @Test

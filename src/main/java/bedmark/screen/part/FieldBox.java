@@ -76,9 +76,11 @@ public final class FieldBox extends HBox {
             pseudoClassStateChanged(QUESTIONED, judged == Judgement.QUESTIONED);
             pseudoClassStateChanged(WRONG, judged == Judgement.WRONG);
         });
+        // Taken here: the list that it stands in would take the focus for itself.
         setOnMousePressed(event -> {
             requestFocus();
             chosen.run();
+            event.consume();
         });
         focusedProperty().subscribe(focused -> {
             if (focused && !active.get()) {

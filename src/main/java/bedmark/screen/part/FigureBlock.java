@@ -1,5 +1,6 @@
 package bedmark.screen.part;
 
+import javafx.css.PseudoClass;
 import javafx.geometry.Pos;
 import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
@@ -7,6 +8,8 @@ import javafx.scene.layout.VBox;
 
 /** Shows a figure: its caption, below it the number and, smaller, what belongs to the number. */
 public final class FigureBlock extends VBox {
+    private static final PseudoClass WORD = PseudoClass.getPseudoClass("word");
+
     private final Label caption = Labels.label("caption");
     private final Label value = Labels.label("value");
     private final Label detail = Labels.label("detail");
@@ -24,6 +27,7 @@ public final class FigureBlock extends VBox {
     public void show(Figure figure) {
         caption.setText(figure.caption());
         value.setText(figure.value());
+        value.pseudoClassStateChanged(WORD, figure.value().chars().noneMatch(Character::isDigit));
         detail.setText(figure.detail());
         setAccessibleText(figure.caption() + " " + figure.value() + " " + figure.detail());
     }

@@ -48,7 +48,7 @@ public final class VerdictBlock extends VBox {
     private GridPane grid() {
         GridPane grid = new GridPane();
         grid.getStyleClass().add("figures");
-        double[] shares = {31, 27, 22, 20};
+        double[] shares = {31, 27, 21, 21};
         for (int i = 0; i < figures.size(); i++) {
             ColumnConstraints column = new ColumnConstraints();
             column.setPercentWidth(shares[i]);

@@ -151,7 +151,7 @@ final class RowView extends VBox {
                 : row.slots().stream().flatMap(slot -> model.impossible(slot).stream()).findFirst();
         message.setText(note.map(this::sentence).orElse(""));
         boolean wrong = note.filter(RowView::isWrong).isPresent();
-        message.getStyleClass().setAll("message", wrong ? "wrong" : "questioned");
+        message.getStyleClass().setAll("label", "message", wrong ? "wrong" : "questioned");
     }
 
     private void update(Slot slot, FieldBox box) {

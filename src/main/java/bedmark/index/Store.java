@@ -163,8 +163,8 @@ public final class Store implements AutoCloseable {
      * @return the entry with its sequence number and time
      * @throws NotSaved where it is not on the medium
      * @throws Refused  {@code survey-unknown}, {@code survey-known}, {@code act-unfit}, {@code revision-unfit},
-     *                  {@code act-without-survey}, {@code photo-missing}, {@code entry-too-large}, or what is wrong in a
-     *                  document: the act is impossible as things stand, and nothing was written
+     *                  {@code act-without-survey}, {@code photo-missing}, {@code entry-too-large}, or what is wrong in
+     *                  a document: the act is impossible as things stand, and nothing was written
      */
     public Entry append(String person, Act act) {
         if (act instanceof Act.PhotoAttached attached && !options.files().exists(photoFile(attached.photo()))) {

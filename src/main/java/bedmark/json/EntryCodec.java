@@ -68,7 +68,7 @@ public final class EntryCodec {
      * @throws Refused where it is no entry that this version knows
      */
     public static Entry read(byte[] payload) {
-        Branch branch = JsonReader.read(payload).root();
+        Branch branch = JsonReader.readOwn(payload).root();
         return new Entry(number(branch, "sequence"), branch.time("at").orElseThrow(() -> absent("at")),
                 text(branch, "person"), uuid(branch, "device"), act(branch));
     }

@@ -35,11 +35,9 @@ public final class JsonReader {
     private static final int DEEPEST = 64;
     private static final int LONGEST_NUMBER = 100;
     private static final int LARGEST_EXPONENT = 100;
-    private static final JsonFactory FACTORY = JsonFactory.builder()
-            .disable(StreamReadFeature.INCLUDE_SOURCE_IN_LOCATION)
-            .streamReadConstraints(StreamReadConstraints.builder()
-                    .maxNestingDepth(DEEPEST).maxNumberLength(LONGEST_NUMBER).maxStringLength(10_000_000).build())
-            .build();
+    private static final JsonFactory FACTORY = factory(DEEPEST);
+    /** What was read from elsewhere lies deeper in what holds it here. */
+    private static final JsonFactory OWN = factory(DEEPEST + 8);
 
     private final JsonParser parser;
     private final Map<Pointer, Document.Place> places = new HashMap<>();
@@ -56,8 +54,24 @@ public final class JsonReader {
      *                 that it is about; {@code json-not-utf8}
      */
     public static Document read(byte[] bytes) {
+        return read(bytes, FACTORY);
+    }
+
+    /** As {@link #read(byte[])}, for what this program wrote around documents that were read before. */
+    static Document readOwn(byte[] bytes) {
+        return read(bytes, OWN);
+    }
+
+    private static JsonFactory factory(int deepest) {
+        return JsonFactory.builder().disable(StreamReadFeature.INCLUDE_SOURCE_IN_LOCATION)
+                .streamReadConstraints(StreamReadConstraints.builder().maxNestingDepth(deepest)
+                        .maxNumberLength(LONGEST_NUMBER).maxStringLength(10_000_000).build())
+                .build();
+    }
+
+    private static Document read(byte[] bytes, JsonFactory factory) {
         String text = decode(bytes);
-        try (JsonParser parser = FACTORY.createParser(text)) {
+        try (JsonParser parser = factory.createParser(text)) {
             return read(new JsonReader(parser));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
@@ -135,8 +149,10 @@ public final class JsonReader {
     private BigDecimal decimal() throws IOException {
         try {
             BigDecimal number = new BigDecimal(parser.getText());
-            if (Math.abs((long) number.scale()) <= LARGEST_EXPONENT) {
-                return number;
+            // It is written without an exponent, and has to be read again then.
+            if (Math.abs((long) number.scale()) <= LARGEST_EXPONENT
+                    && number.toPlainString().length() <= LONGEST_NUMBER) {
+                return number.scale() < 0 ? number.setScale(0) : number;
             }
         } catch (NumberFormatException e) {
             throw new Refused(refused("number", parser.getText()).defect(), e);

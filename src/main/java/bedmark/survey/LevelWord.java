@@ -6,8 +6,10 @@ import bedmark.engine.verdict.Level;
 import java.util.List;
 
 /**
- * Judges one survey in a word, for lists: the level of its verdict by the register that it was made with. Keeps the
- * assessor of the register that it met last, since lists hold many surveys of one register.
+ * Judges one survey in a word, for lists: the level of its verdict by the register that it was made with. The survey is
+ * judged alone: what the other zones of its conveyor ask of the drive comes in where the whole round is judged, so that
+ * its {@code skirts-over-budget} may say more there. Keeps the assessor of the register that it met last, since lists
+ * hold many surveys of one register.
  */
 public final class LevelWord {
     private Branch known = Branch.EMPTY;

@@ -66,11 +66,11 @@ class BadInputTest {
         "\"transfer\": \"t1\",\\n      \"form\" | \"transfer\": \"t9\",\\n      \"form\" | transfer point \"t9\"",
         "\"troughAngle\": {\"value\": 35, | \"troughAngle\": {\"value\": 95, | /plant/conveyors/0/troughAngle (31:",
         "\"troughAngle\": {\"value\": 35, | \"troughAngle\": {\"value\": 95, | 95 deg can't be; enter 0 deg to 89 deg",
-        "\"skirtSpacing\": {\"value\": 600, | \"skirtSpacing\": {\"value\": 1200, | beyond the wing rolls, which end at 0.79873",
+        "\"skirtSpacing\": {\"value\": 600, | \"skirtSpacing\": {\"value\": 1200, | wing rolls, which end at 0.79873 m",
         "0.1280 | 1e99 | /plant/materials/0/skirtFrictionFactor (17:",
         "\"near\": 0.8, | \"near\": 1.8, | the near limit 1.8 lies beyond the overloaded one 0.95",
         "\"supersedes\": null | \"supersedes\": \"0b2f6c1e-6f0e-4f6f-9a70-0d0e3f8f1a03\" | revision is not lower",
-        "\"worn\", \"length\": {\"value\": 20, | \"worn\", \"length\": {\"value\": 15, | seals of the left side add up to 4.572",
+        "\"worn\", \"length\": {\"value\": 20, | \"worn\", \"length\": {\"value\": 15, | left side add up to 4.572 m",
         "\"position\": {\"value\": 3, | \"position\": {\"value\": 7, | beyond the zone",
         "\"position\": {\"value\": 3, | \"position\": {\"value\": 0.0, | there is a station at"})
     void impossibleBundleNamesPlaceAndRemedy(String was, String becomes, String said) throws IOException {

@@ -108,6 +108,14 @@ class CommandsTest {
         assertEquals(6, json(Terminal.run("assess", temp.toString(), "--json")).branches("surveys").size());
     }
 
+    @Test
+    void unpackedPackIsReadAsThePackIs() throws Exception {
+        Files.createDirectories(temp.resolve("bag/data"));
+        Files.copy(Path.of(BUNDLE), temp.resolve("bag/data/bundle.json"));
+        assertEquals(Terminal.run("assess", BUNDLE, "--json"),
+                Terminal.run("assess", temp.resolve("bag").toString(), "--json"));
+    }
+
     @ParameterizedTest
     @ValueSource(strings = {"--help", "assess --help", "pack --help", "pack verify --help", "pack make --help",
         "forms check --help", "store check --help", "store rebuild --help", "open --help", "--version"})

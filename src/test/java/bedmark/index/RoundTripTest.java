@@ -69,6 +69,14 @@ class RoundTripTest {
     }
 
     @Test
+    void whatIsNestedAsDeepAsABundleMayBeSurvivesTheStore() throws IOException {
+        String deep = "[".repeat(62) + "]".repeat(62);
+        Bundle bundle = BundleReader.read(Files.readString(BUNDLE).replace("\"x-plant\": true",
+                "\"x-plant\": " + deep).getBytes(StandardCharsets.UTF_8));
+        assertEquals(bundle.document().get("plant"), throughAStore(bundle, false).document().get("plant"));
+    }
+
+    @Test
     void digitsAndSecondsStandAsTheyWereWritten() throws IOException {
         String out = new String(JsonWriter.indented(throughAStore(taken(), true).document()), StandardCharsets.UTF_8);
         for (String digits : List.of("0.1280", "20.0", "2.50", "\"9 1/2\"", "2026-03-01T08:30:00+01:00",

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
+import bedmark.document.Branch;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
 import java.nio.charset.StandardCharsets;
@@ -20,6 +21,21 @@ class JsonReaderTest {
     void decimalsKeepTheirTrailingZeros() {
         byte[] text = bytes("{\"value\":9.50,\"many\":[1,2.00,0.250],\"unknown\":{\"a\":null}}");
         assertArrayEquals(text, JsonWriter.compact(JsonReader.read(text).root()));
+    }
+
+    /** A journal that takes in what it cannot read again would lose it. */
+    @ParameterizedTest
+    @ValueSource(strings = {"1e99", "-1E+98", "1e-97", "1.50e-40", "0e-90", "123456789012345678901234567890.5"})
+    void whatIsReadCanBeWrittenAndReadAgain(String number) {
+        Branch read = JsonReader.read(bytes("{\"a\":" + number + "}")).root();
+        assertEquals(read, JsonReader.read(JsonWriter.compact(read)).root());
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"1e100", "1e-99", "1e101", "-1.5e-100", "0e-100"})
+    void numberThatIsLongerThanItsLimitWhenWrittenOutIsRefused(String number) {
+        Refused refused = assertThrows(Refused.class, () -> JsonReader.read(bytes("{\"a\":" + number + "}")));
+        assertEquals("number", refused.defect().details().get(2));
     }
 
     @Test

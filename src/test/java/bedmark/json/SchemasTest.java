@@ -7,12 +7,14 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
+import bedmark.engine.Result;
 import bedmark.engine.bed.DepthMethod;
 import bedmark.engine.drag.DragMethod;
 import bedmark.engine.seal.SealCondition;
 import bedmark.engine.seal.SealType;
 import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Instrument;
+import bedmark.engine.verdict.Component;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Rule;
 import bedmark.form.Group;
@@ -121,8 +123,8 @@ class SchemasTest {
         assertEquals(types, words("bundle", "/$defs/sealRate/properties/type/enum"));
         assertEquals(conditions, words("bundle", "/$defs/sealRate/properties/condition/enum"));
         assertEquals(codes(DepthMethod.values(), DepthMethod::code), words("bundle", "/$defs/depthMethod/enum"));
-        assertTrue(words("bundle", "/$defs/plant/properties/method/enum").containsAll(drags));
-        assertTrue(words("assessment", "/$defs/assessment/properties/method/enum").containsAll(drags));
+        assertEquals(drags, words("bundle", "/$defs/plant/properties/method/enum"));
+        assertEquals(drags, words("assessment", "/$defs/assessment/properties/method/enum"));
         assertEquals(codes(Stream.of(Instrument.values()).filter(one -> one != Instrument.EXACT)
                         .toArray(Instrument[]::new), Instrument::code),
                 words("bundle", "/$defs/instrument/properties/kind/enum"));
@@ -130,6 +132,16 @@ class SchemasTest {
                 words("assessment", "/$defs/assessment/properties/level/enum"));
         assertEquals(codes(InspectionStatus.values(), InspectionStatus::code),
                 words("bundle", "/$defs/survey/properties/inspectionStatus/enum"));
+    }
+
+    @Test
+    void everyResultIsInTheAssessment() {
+        Branch keys = (Branch) schema("assessment").at(Pointer.parse("/$defs/assessment/properties")).orElseThrow();
+        for (Result result : Result.values()) {
+            assertTrue(keys.has(result.key()), result.key());
+        }
+        assertEquals(codes(Component.values(), Component::code),
+                words("assessment", "/$defs/assessment/properties/leading/enum"));
     }
 
     @Test

@@ -9,24 +9,16 @@ import bedmark.engine.uncertainty.Tape;
 import bedmark.engine.uncertainty.Uncertain;
 import bedmark.engine.verdict.AllowedDepth;
 import bedmark.engine.verdict.Component;
-import bedmark.engine.verdict.Finding;
-import bedmark.engine.verdict.Judgement;
-import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Limit;
 import bedmark.engine.verdict.Rule;
 import java.util.ArrayList;
-import java.util.Collection;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalDouble;
-import java.util.stream.IntStream;
 
 /** The assessment of one zone in the making: computed first, judged once its conveyor's load is known. */
 final class Appraisal {
-    private static final String OF_THIS_WALK = "/readings/";
-
     private final ZoneFacts zone;
     private final Tape tape;
     private final FeedFacts today;
@@ -51,28 +43,31 @@ final class Appraisal {
 
     Assessment judge(Optional<ConveyorLoad> loadToday, Optional<ConveyorLoad> loadAtDesign) {
         Map<Result, Deduced<Uncertain>> results = results();
-        Observations observations = new Observations(today, today);
-        Map<Rule, Deduced<Uncertain>> observed = observations.all();
-        List<Finding> findings = findings(observations, observed, loadToday);
-        List<Finding> atDesign = design.map(feed -> {
-            Observations then = new Observations(today, feed);
-            return findings(then, then.all(), loadAtDesign);
-        }).orElse(List.of());
+        Map<DragMethod, Deduced<Uncertain>> methods = today.methods();
+        Findings findings = Findings.today(today, loadToday);
+        Optional<Findings> atDesign = design.map(feed -> findings.atDesign(today, feed, loadAtDesign));
         Requirements requirements = new Requirements(zone);
         List<String> required = requirements.required(today.materialDrag());
         List<Deduced<?>> numbers = new ArrayList<>(results.values());
-        numbers.addAll(today.methods().values());
-        numbers.addAll(observed.values());
+        numbers.addAll(methods.values());
+        numbers.addAll(findings.numbers());
         List<DepthPoint> profile = today.profile().value().map(this::points).orElse(List.of());
-        List<Assumption> assumptions = new Assumptions(today).all(profile, design.isPresent());
-        lowerBound(findings, loadToday).ifPresent(assumptions::add);
-        Level level = level(findings, required);
+        List<Assumption> assumptions = new Assumptions(today, methods).all(profile, design.isPresent());
+        loadToday.filter(sum -> sum.lacking() > 0 && findings.has(Rule.SKIRTS_OVER_BUDGET))
+                .ifPresent(sum -> assumptions.add(
+                        Assumption.of("conveyor-sum-lower-bound", Integer.toString(sum.lacking()))));
         return new Assessment(today.materialDrag().value().map(drag -> today.method()),
-                estimates(Result.class, results), estimates(DragMethod.class, today.methods()), energyKind(), profile,
-                level, design.map(feed -> level(atDesign, required)), findings, atDesign, allowedDepths(),
-                new Remedies(zone.zone(), zone.settings()).all(), assumptions,
-                requirements.all(required, numbers), required, zone.sidesWithoutSeals(),
-                today.skirtPower().value().map(tape::shares).orElse(List.<Share>of()), leading(), repeat(findings));
+                estimates(Result.class, results), estimates(DragMethod.class, methods), energyKind(), profile,
+                findings.level(!required.isEmpty()), atDesign.map(then -> then.level(!required.isEmpty())),
+                findings.all(), atDesign.map(Findings::all).orElse(List.of()), allowedDepths(),
+                new Remedies(zone, findings.all(), othersShare(loadToday)).all(), assumptions, requirements.all(required, numbers), required,
+                zone.sidesWithoutSeals(), today.skirtPower().value().map(tape::shares).orElse(List.<Share>of()),
+                leading(), findings.repeat());
+    }
+
+    private double othersShare(Optional<ConveyorLoad> load) {
+        return load.isPresent() && today.driveShare().isKnown()
+                ? load.get().share().value() - today.driveShare().get().value() : 0;
     }
 
     private Map<Result, Deduced<Uncertain>> results() {
@@ -106,57 +101,25 @@ final class Appraisal {
         if (zone.zone().get(Datum.RUNNING_POWER).filter(power -> power.value() > 0).isEmpty()) {
             return Deduced.nothing();
         }
-        Deduced<Uncertain> running = Observations.runningShaftPower(zone);
-        return Deduced.from(() -> today.drivePower().get().over(running.get()), today.drivePower(), running);
+        return Deduced.from(today.drivePower(), Observations.runningShaftPower(zone), Uncertain::over);
     }
 
     private <K extends Enum<K>> Map<K, Estimate> estimates(Class<K> keys, Map<K, Deduced<Uncertain>> numbers) {
         Map<K, Estimate> estimates = new EnumMap<>(keys);
-        numbers.forEach((key, number) ->
-                number.value().ifPresent(known -> estimates.put(key, tape.estimate(known))));
+        for (Map.Entry<K, Deduced<Uncertain>> number : numbers.entrySet()) {
+            if (number.getValue().isKnown()) {
+                estimates.put(number.getKey(), tape.estimate(number.getValue().get()));
+            }
+        }
         return estimates;
     }
 
     private List<DepthPoint> points(Profile profile) {
-        return IntStream.range(0, profile.stations()).mapToObj(station -> new DepthPoint(
-                profile.position(station).value(), tape.estimate(profile.depth(station)))).toList();
-    }
-
-    private List<Finding> findings(Observations observations, Map<Rule, Deduced<Uncertain>> observed,
-            Optional<ConveyorLoad> load) {
-        List<Finding> findings = new ArrayList<>();
-        for (Rule rule : Rule.values()) {
-            Limit limit = observations.limit(rule);
-            if (!limit.on()) {
-                continue;
-            }
-            if (rule == Rule.SKIRTS_OVER_BUDGET) {
-                load.map(sum -> judge(rule, sum.share(), limit, today.driveShare().value()))
-                        .filter(finding -> load.get().lacking() == 0 || finding.level() != Level.WITHIN)
-                        .ifPresent(findings::add);
-            } else {
-                observed.get(rule).value().ifPresent(number ->
-                        findings.add(judge(rule, tape.estimate(number), limit, Optional.of(number))));
-            }
+        List<DepthPoint> points = new ArrayList<>(profile.stations());
+        for (int i = 0; i < profile.stations(); i++) {
+            points.add(new DepthPoint(profile.position(i).value(), tape.estimate(profile.depth(i))));
         }
-        return findings;
-    }
-
-    private Finding judge(Rule rule, Estimate observed, Limit limit, Optional<Uncertain> cause) {
-        return Judgement.of(rule, observed, limit, zone.settings().certainty(),
-                cause.flatMap(number -> tape.leading(number, OF_THIS_WALK)));
-    }
-
-    /** A sum that lacks zones can only show that the limit is passed, never that it is kept. */
-    private static Optional<Assumption> lowerBound(List<Finding> findings, Optional<ConveyorLoad> load) {
-        return load.filter(sum -> sum.lacking() > 0
-                && findings.stream().anyMatch(finding -> finding.rule() == Rule.SKIRTS_OVER_BUDGET))
-                .map(sum -> Assumption.of("conveyor-sum-lower-bound", Integer.toString(sum.lacking())));
-    }
-
-    private static Level level(Collection<Finding> findings, List<String> missingRequired) {
-        return findings.stream().map(Finding::level)
-                .reduce(missingRequired.isEmpty() ? Level.WITHIN : Level.INCOMPLETE, Level::or);
+        return points;
     }
 
     private List<AllowedDepth> allowedDepths() {
@@ -169,11 +132,7 @@ final class Appraisal {
     private Optional<AllowedDepth> allowed(Rule rule, Deduced<Uncertain> whole) {
         Limit limit = zone.settings().limits().of(rule);
         return whole.value().filter(depth -> limit.on()).map(depth -> new AllowedDepth(rule,
-                times(limit.near(), depth.value()), times(limit.overloaded(), depth.value())));
-    }
-
-    private static OptionalDouble times(OptionalDouble limit, double depth) {
-        return limit.isPresent() ? OptionalDouble.of(limit.getAsDouble() * depth) : limit;
+                Findings.times(limit.near(), depth.value()), Findings.times(limit.overloaded(), depth.value())));
     }
 
     private Optional<Assessment.EnergyKind> energyKind() {
@@ -192,10 +151,5 @@ final class Appraisal {
             }
             return seal > bed ? Component.SEAL : Component.BED;
         });
-    }
-
-    private static Optional<String> repeat(List<Finding> findings) {
-        return findings.stream().filter(finding -> finding.level() == Level.UNDECIDED)
-                .flatMap(finding -> finding.leadingReading().stream()).findFirst();
     }
 }

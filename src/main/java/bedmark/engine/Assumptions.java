@@ -10,6 +10,7 @@ import bedmark.engine.uncertainty.Uncertain;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 
 /** What was taken for granted in the results of one zone. */
@@ -19,10 +20,12 @@ final class Assumptions {
 
     private final ZoneFacts zone;
     private final FeedFacts today;
+    private final Map<DragMethod, Deduced<Uncertain>> methods;
 
-    Assumptions(FeedFacts today) {
+    Assumptions(FeedFacts today, Map<DragMethod, Deduced<Uncertain>> methods) {
         zone = today.zone();
         this.today = today;
+        this.methods = methods;
     }
 
     /**
@@ -67,9 +70,9 @@ final class Assumptions {
     }
 
     private void material(Set<Assumption> all) {
-        if (today.methods().get(DragMethod.RANKINE).isKnown()) {
+        if (methods.get(DragMethod.RANKINE).isKnown()) {
             all.add(Assumption.of("repose-for-friction-angle"));
-            absent(all, "wall-friction-one", Datum.WALL_FRICTION, today.methods().get(DragMethod.RANKINE));
+            absent(all, "wall-friction-one", Datum.WALL_FRICTION, methods.get(DragMethod.RANKINE));
         }
     }
 

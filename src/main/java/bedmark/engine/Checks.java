@@ -23,19 +23,20 @@ final class Checks {
     /** @throws ImpossibleReading with the first reason */
     void run() {
         zone.data().forEach((datum, reading) -> datum.domain().check(reading));
-        zone.stations().forEach(station -> {
+        for (Station station : zone.stations()) {
             Domain.NOT_NEGATIVE.check(station.position());
             Domain.NOT_NEGATIVE.check(station.raw());
-        });
-        zone.seals().forEach(segment -> Domain.POSITIVE.check(segment.length()));
+        }
+        for (SealSegment segment : zone.seals()) {
+            Domain.POSITIVE.check(segment.length());
+        }
         centreRoll();
         board(Datum.READ_SPACING);
         board(Datum.REGISTER_SPACING);
         stations();
         zone.get(Datum.ZONE_LENGTH).ifPresent(length -> {
-            for (Side side : Side.values()) {
-                seals(side, length.value());
-            }
+            seals(Side.LEFT, length.value());
+            seals(Side.RIGHT, length.value());
         });
     }
 
@@ -72,23 +73,29 @@ final class Checks {
 
     private void stations() {
         List<Station> stations = zone.stations();
+        double length = zone.get(Datum.ZONE_LENGTH).map(Reading::value).orElse(Double.POSITIVE_INFINITY);
         for (int i = 0; i < stations.size(); i++) {
             Reading position = stations.get(i).position();
             if (i > 0 && position.value() == stations.get(i - 1).position().value()) {
                 throw new ImpossibleReading("station-twice", position.name(), Double.toString(position.value()));
             }
-            zone.get(Datum.ZONE_LENGTH).filter(length -> position.value() > length.value() * (1 + ROUNDING))
-                    .ifPresent(length -> {
-                        throw new ImpossibleReading("station-outside-zone", position.name(),
-                                Double.toString(position.value()), Double.toString(length.value()));
-                    });
+            if (position.value() > length * (1 + ROUNDING)) {
+                throw new ImpossibleReading("station-outside-zone", position.name(),
+                        Double.toString(position.value()), Double.toString(length));
+            }
         }
     }
 
     private void seals(Side side, double length) {
-        List<SealSegment> segments = zone.seals().stream().filter(segment -> segment.side() == side).toList();
-        double sum = segments.stream().mapToDouble(segment -> segment.length().value()).sum();
-        if (!segments.isEmpty() && Math.abs(sum - length) > length * (SEAL_TOLERANCE + ROUNDING)) {
+        boolean recorded = false;
+        double sum = 0;
+        for (SealSegment segment : zone.seals()) {
+            if (segment.side() == side) {
+                recorded = true;
+                sum += segment.length().value();
+            }
+        }
+        if (recorded && Math.abs(sum - length) > length * (SEAL_TOLERANCE + ROUNDING)) {
             throw new ImpossibleReading("seal-lengths-disagree", "/readings/seals", side.code(),
                     Double.toString(sum), Double.toString(length));
         }

@@ -30,6 +30,10 @@ record ConveyorLoad(Estimate share, int lacking) {
         if (known.isEmpty()) {
             return Optional.empty();
         }
+        int lacking = unsurveyed + zones.size() - known.size();
+        if (known.size() == 1) {
+            return Optional.of(new ConveyorLoad(known.get(0).tape().estimate(known.get(0).driveShare().get()), lacking));
+        }
         double sum = 0;
         double variance = 0;
         Map<Reading, Double> common = new HashMap<>();
@@ -46,8 +50,7 @@ record ConveyorLoad(Estimate share, int lacking) {
         for (Map.Entry<Reading, Double> entry : common.entrySet()) {
             variance += new Sensitivity(entry.getKey(), entry.getValue()).variance();
         }
-        return Optional.of(new ConveyorLoad(new Estimate(sum, Math.sqrt(variance)),
-                unsurveyed + zones.size() - known.size()));
+        return Optional.of(new ConveyorLoad(new Estimate(sum, Math.sqrt(variance)), lacking));
     }
 
     private static boolean isOwn(Reading reading) {

@@ -1,6 +1,8 @@
 package bedmark.engine;
 
 import bedmark.engine.uncertainty.ImpossibleReading;
+import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 
@@ -28,12 +30,22 @@ public final class Engine {
      */
     public static List<Assessment> assessConveyor(List<LoadingZone> zones, int unsurveyed, Settings settings) {
         zones.forEach(Engine::check);
-        List<Appraisal> appraisals = zones.stream().map(zone -> new Appraisal(zone, settings)).toList();
-        Optional<ConveyorLoad> today = ConveyorLoad.of(
-                appraisals.stream().map(Appraisal::loadToday).toList(), unsurveyed);
-        Optional<ConveyorLoad> atDesign = ConveyorLoad.of(
-                appraisals.stream().map(Appraisal::loadAtDesign).toList(), unsurveyed);
-        return appraisals.stream().map(appraisal -> appraisal.judge(today, atDesign)).toList();
+        List<Appraisal> appraisals = new ArrayList<>(zones.size());
+        List<ConveyorLoad.Part> partsToday = new ArrayList<>(zones.size());
+        List<ConveyorLoad.Part> partsAtDesign = new ArrayList<>(zones.size());
+        for (LoadingZone zone : zones) {
+            Appraisal appraisal = new Appraisal(zone, settings);
+            appraisals.add(appraisal);
+            partsToday.add(appraisal.loadToday());
+            partsAtDesign.add(appraisal.loadAtDesign());
+        }
+        Optional<ConveyorLoad> today = ConveyorLoad.of(partsToday, unsurveyed);
+        Optional<ConveyorLoad> atDesign = ConveyorLoad.of(partsAtDesign, unsurveyed);
+        List<Assessment> assessments = new ArrayList<>(zones.size());
+        for (Appraisal appraisal : appraisals) {
+            assessments.add(appraisal.judge(today, atDesign));
+        }
+        return Collections.unmodifiableList(assessments);
     }
 
     /**

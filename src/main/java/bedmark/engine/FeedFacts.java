@@ -7,6 +7,7 @@ import bedmark.engine.drag.SpecialResistance;
 import bedmark.engine.drag.TabulatedFactor;
 import bedmark.engine.flow.LoadingForce;
 import bedmark.engine.uncertainty.Uncertain;
+import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
 
@@ -20,7 +21,6 @@ final class FeedFacts {
     private final Deduced<Uncertain> area;
     private final Deduced<Uncertain> impliedFlow;
     private final Deduced<Uncertain> flow;
-    private final Map<DragMethod, Deduced<Uncertain>> methods;
     private final Deduced<Uncertain> materialDrag;
     private final Deduced<Uncertain> skirtDrag;
     private final Deduced<Uncertain> skirtPower;
@@ -35,19 +35,16 @@ final class FeedFacts {
         this.profile = profile;
         this.statedFlow = statedFlow;
         Deduced<Uncertain> speed = zone.beltSpeed();
-        Deduced<Uncertain> density = zone.number(Datum.BULK_DENSITY);
-        integralOfSquare = Deduced.from(() -> profile.get().integralOfSquare(), profile);
-        meanDepth = Deduced.from(() -> profile.get().integral().over(profile.get().length()), profile);
-        area = Deduced.from(() -> zone.section().get().area(profile.get().meanLevel()), profile, zone.section());
-        impliedFlow = Deduced.from(() -> density.get().times(speed.get()).times(area.get()), density, speed, area);
+        integralOfSquare = Deduced.from(profile, Profile::integralOfSquare);
+        meanDepth = Deduced.from(profile, bed -> bed.integral().over(bed.length()));
+        area = Deduced.from(profile, zone.section(), (bed, section) -> section.area(bed.meanLevel()));
+        impliedFlow = Deduced.from(zone.number(Datum.BULK_DENSITY), speed, area,
+                (density, v, bed) -> density.times(v).times(bed));
         flow = statedFlow.isKnown() ? statedFlow : impliedFlow;
-        methods = Map.of(DragMethod.TABULATED, tabulated(), DragMethod.RANKINE, rankine(density),
-                DragMethod.ISO_5048, specialResistance(speed, density));
-        materialDrag = methods.get(method());
-        skirtDrag = Deduced.from(() -> materialDrag.get().plus(zone.sealDrag().get()), materialDrag, zone.sealDrag());
-        skirtPower = Deduced.from(() -> skirtDrag.get().times(speed.get()), skirtDrag, speed);
-        Deduced<Uncertain> efficiency = zone.number(Datum.DRIVE_EFFICIENCY);
-        drivePower = Deduced.from(() -> skirtPower.get().over(efficiency.get()), skirtPower, efficiency);
+        materialDrag = drag(method());
+        skirtDrag = Deduced.from(materialDrag, zone.sealDrag(), Uncertain::plus);
+        skirtPower = Deduced.from(skirtDrag, speed, Uncertain::times);
+        drivePower = Deduced.from(skirtPower, zone.number(Datum.DRIVE_EFFICIENCY), Uncertain::over);
     }
 
     /** As it was read. */
@@ -61,17 +58,17 @@ final class FeedFacts {
      */
     static Deduced<FeedFacts> atDesign(ZoneFacts zone) {
         Deduced<Uncertain> design = zone.number(Datum.DESIGN_THROUGHPUT);
-        Deduced<Uncertain> read = zone.number(Datum.THROUGHPUT);
-        return Deduced.perhaps(() -> read.get().value() == 0 ? Optional.empty()
-                : Optional.of(new FeedFacts(zone, scaled(zone, design.get().over(read.get())), design)),
-                design, read, zone.profile(), zone.section());
+        return Deduced.flat(Deduced.from(design, zone.number(Datum.THROUGHPUT), zone.profile(), zone.section(),
+                (wanted, read, bed, section) -> read.value() == 0 ? Optional.empty()
+                        : Optional.of(new FeedFacts(zone, scaled(zone, wanted.over(read)), design))));
     }
 
     /** The bed with its area at each station multiplied. */
     static Deduced<Profile> scaled(ZoneFacts zone, Uncertain factor) {
-        return Deduced.from(() -> zone.profile().get().map(level ->
-                zone.section().get().level(zone.section().get().area(level).times(factor))),
-                zone.profile(), zone.section());
+        return Deduced.from(zone.profile(), zone.section(), (bed, section) -> {
+            Uncertain carried = section.carriedDepth();
+            return bed.map(level -> level.plus(carried).times(factor).minus(carried));
+        });
     }
 
     /** The method in use: the site's, else the tabulated factor where the material has one, else Rankine's. */
@@ -94,7 +91,7 @@ final class FeedFacts {
     }
 
     Deduced<Uncertain> meanSquare() {
-        return Deduced.from(() -> integralOfSquare.get().over(zone.length().get()), integralOfSquare, zone.length());
+        return Deduced.from(integralOfSquare, zone.length(), Uncertain::over);
     }
 
     Deduced<Uncertain> meanDepth() {
@@ -102,14 +99,13 @@ final class FeedFacts {
     }
 
     Deduced<Uncertain> deepest() {
-        return Deduced.from(() -> profile.get().deepest(), profile);
+        return Deduced.from(profile, Profile::deepest);
     }
 
     /** (Mean depth)² over the mean of the square; nothing where the bed touches nowhere. */
     Deduced<Uncertain> squareOfMeanShare() {
-        Deduced<Uncertain> meanSquare = meanSquare();
-        return Deduced.perhaps(() -> meanSquare.get().value() == 0 ? Optional.empty()
-                : Optional.of(meanDepth.get().square().over(meanSquare.get())), meanSquare, meanDepth);
+        return Deduced.flat(Deduced.from(meanSquare(), meanDepth, (square, mean) -> square.value() == 0
+                ? Optional.empty() : Optional.of(mean.square().over(square))));
     }
 
     Deduced<Uncertain> area() {
@@ -120,8 +116,21 @@ final class FeedFacts {
         return impliedFlow;
     }
 
+    /** The material drag by every method, the one in use among them. */
     Map<DragMethod, Deduced<Uncertain>> methods() {
+        Map<DragMethod, Deduced<Uncertain>> methods = new EnumMap<>(DragMethod.class);
+        for (DragMethod method : DragMethod.values()) {
+            methods.put(method, method == method() ? materialDrag : drag(method));
+        }
         return methods;
+    }
+
+    private Deduced<Uncertain> drag(DragMethod method) {
+        return switch (method) {
+            case TABULATED -> tabulated();
+            case RANKINE -> rankine();
+            case ISO_5048 -> specialResistance();
+        };
     }
 
     Deduced<Uncertain> materialDrag() {
@@ -141,60 +150,57 @@ final class FeedFacts {
     }
 
     Deduced<Uncertain> driveShare() {
-        Deduced<Uncertain> rated = zone.number(Datum.RATED_POWER);
-        return Deduced.from(() -> drivePower.get().over(rated.get()), drivePower, rated);
+        return Deduced.from(drivePower, zone.number(Datum.RATED_POWER), Uncertain::over);
     }
 
     /** Energy of the skirts in a year (Wh): electrical where the motor's efficiency is known, else the shaft's. */
     Deduced<Uncertain> energy() {
-        Deduced<Uncertain> hours = zone.number(Datum.LOADED_HOURS);
         Uncertain motor = zone.sources().numberOr(Datum.MOTOR_EFFICIENCY, 1);
-        return Deduced.from(() -> drivePower.get().over(motor).times(hours.get()), drivePower, hours);
+        return Deduced.from(drivePower, zone.number(Datum.LOADED_HOURS),
+                (power, hours) -> power.over(motor).times(hours));
     }
 
     Deduced<Uncertain> loadingForce() {
-        return Deduced.from(() -> LoadingForce.of(flow.get(), zone.beltSpeed().get(), zone.feedVelocity()),
-                flow, zone.beltSpeed());
+        return Deduced.from(flow, zone.beltSpeed(),
+                (passing, speed) -> LoadingForce.of(passing, speed, zone.feedVelocity()));
     }
 
     /** Flow over the capacity of the open belt; nothing on a belt that stands. */
     Deduced<Uncertain> fill() {
-        Deduced<Uncertain> density = zone.number(Datum.BULK_DENSITY);
-        Deduced<Uncertain> speed = zone.beltSpeed();
-        return Deduced.perhaps(() -> {
-            Uncertain capacity = density.get().times(zone.capacityArea().get()).times(speed.get());
-            return capacity.value() == 0 ? Optional.empty() : Optional.of(flow.get().over(capacity));
-        }, flow, density, zone.capacityArea(), speed);
+        return Deduced.flat(Deduced.from(flow, zone.number(Datum.BULK_DENSITY), zone.capacityArea(), zone.beltSpeed(),
+                (passing, density, open, speed) -> {
+                    Uncertain capacity = density.times(open).times(speed);
+                    return capacity.value() == 0 ? Optional.empty() : Optional.of(passing.over(capacity));
+                }));
     }
 
     /** Stated over implied flow; nothing without a stated one, or where nothing can flow. */
     Deduced<Uncertain> bedSpeedRatio() {
-        return statedFlow.isKnown() ? Deduced.perhaps(() -> impliedFlow.get().value() == 0 ? Optional.empty()
-                : Optional.of(statedFlow.get().over(impliedFlow.get())), impliedFlow) : Deduced.nothing();
+        return statedFlow.isKnown() ? Deduced.flat(Deduced.from(impliedFlow, implied -> implied.value() == 0
+                ? Optional.empty() : Optional.of(statedFlow.get().over(implied)))) : Deduced.nothing();
     }
 
     private Deduced<Uncertain> tabulated() {
-        Deduced<Uncertain> factor = zone.number(Datum.SKIRT_FRICTION_FACTOR);
-        return Deduced.from(() -> TabulatedFactor.drag(factor.get(), integralOfSquare.get()),
-                factor, integralOfSquare);
+        return Deduced.from(zone.number(Datum.SKIRT_FRICTION_FACTOR), integralOfSquare, TabulatedFactor::drag);
     }
 
-    private Deduced<Uncertain> rankine(Deduced<Uncertain> density) {
-        Deduced<Uncertain> repose = zone.number(Datum.ANGLE_OF_REPOSE);
-        return Deduced.from(() -> RankinePressure.drag(zone.sources().numberOr(Datum.WALL_FRICTION, 1), repose.get(),
-                density.get(), integralOfSquare.get()), repose, density, integralOfSquare);
+    private Deduced<Uncertain> rankine() {
+        return Deduced.from(zone.number(Datum.ANGLE_OF_REPOSE), zone.number(Datum.BULK_DENSITY), integralOfSquare,
+                (repose, density, square) -> RankinePressure.drag(
+                        zone.sources().numberOr(Datum.WALL_FRICTION, 1), repose, density, square));
     }
 
-    private Deduced<Uncertain> specialResistance(Deduced<Uncertain> speed, Deduced<Uncertain> density) {
+    private Deduced<Uncertain> specialResistance() {
+        Deduced<Uncertain> density = zone.number(Datum.BULK_DENSITY);
+        Deduced<Uncertain> speed = zone.beltSpeed();
+        Deduced<Uncertain> spacing = zone.spacing();
         Deduced<Uncertain> acceleration = zone.accelerationLength();
-        return Deduced.perhaps(() -> {
+        Deduced<Uncertain> length = zone.length();
+        return Deduced.flat(Deduced.fromAll(() -> {
             Uncertain feed = zone.feedVelocity();
-            if (speed.get().value() == 0 || speed.get().plus(feed).value() <= 0) {
-                return Optional.empty();
-            }
-            return Optional.of(SpecialResistance.drag(zone.sources().boardGrip(),
-                    flow.get().over(density.get()), density.get(), speed.get(), feed, zone.spacing().get(),
-                    acceleration.get(), zone.length().get()));
-        }, flow, density, speed, zone.spacing(), acceleration, zone.length());
+            return speed.get().value() == 0 || speed.get().value() + feed.value() <= 0 ? Optional.empty()
+                    : Optional.of(SpecialResistance.drag(zone.sources().boardGrip(), flow.get().over(density.get()),
+                            density.get(), speed.get(), feed, spacing.get(), acceleration.get(), length.get()));
+        }, flow, density, speed, spacing, acceleration, length));
     }
 }

@@ -6,7 +6,7 @@ import java.util.function.DoubleUnaryOperator;
 /** Where a rising function reaches a value: regula falsi in the Illinois form, which always keeps the root between. */
 final class Inversion {
     private static final int MOST_STEPS = 100;
-    private static final double CLOSE = 1e-14;
+    private static final double CLOSE = 1e-15;
 
     private Inversion() {
     }
@@ -20,10 +20,16 @@ final class Inversion {
         if (!(under <= 0 && over >= 0)) {
             return OptionalDouble.empty();
         }
+        double best = under == 0 ? from : to;
         int side = 0;
-        for (int step = 0; step < MOST_STEPS && over > 0 && under < 0 && to - from > CLOSE * Math.abs(to); step++) {
+        for (int step = 0; step < MOST_STEPS && over > 0 && under < 0; step++) {
             double between = Math.min(to, Math.max(from, (from * over - to * under) / (over - under)));
             double excess = rising.applyAsDouble(between) - target;
+            boolean arrived = Math.abs(between - best) <= CLOSE * Math.abs(between);
+            best = between;
+            if (arrived) {
+                break;
+            }
             if (excess >= 0) {
                 to = between;
                 over = excess;
@@ -36,6 +42,6 @@ final class Inversion {
                 side = -1;
             }
         }
-        return OptionalDouble.of(under == 0 ? from : to);
+        return OptionalDouble.of(best);
     }
 }

@@ -63,6 +63,16 @@ public record LoadingZone(Map<Datum, Reading> data, List<Station> stations, List
         return marks.contains(mark);
     }
 
+    /** Whether some seal is in one of those conditions. */
+    public boolean hasSeals(Set<SealCondition> conditions) {
+        for (SealSegment segment : seals) {
+            if (conditions.contains(segment.condition())) {
+                return true;
+            }
+        }
+        return false;
+    }
+
     /** The same zone with a number set; it takes the name of its place. */
     public LoadingZone with(Datum datum, double value, double standardUncertainty) {
         Map<Datum, Reading> changed = new EnumMap<>(Datum.class);

@@ -3,18 +3,17 @@ package bedmark.engine;
 import bedmark.engine.bed.Section;
 import bedmark.engine.flow.BoardPlacement;
 import bedmark.engine.flow.MaximumBeltSpeed;
-import bedmark.engine.seal.SealCondition;
+import bedmark.engine.flow.SpeedClass;
+import bedmark.engine.seal.SealSegment;
 import bedmark.engine.uncertainty.Uncertain;
 import bedmark.engine.verdict.Limit;
 import bedmark.engine.verdict.Rule;
-import java.util.EnumMap;
-import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
- * What each rule observes of a zone at one feed. The power of the conveyor's skirts is not among them: it takes all of
- * its zones.
+ * What each rule observes of a zone at one feed. Of the power of the conveyor's skirts it is this zone's part: the sum
+ * takes all of its zones.
  */
 final class Observations {
     private final ZoneFacts zone;
@@ -31,25 +30,32 @@ final class Observations {
         this.feed = feed;
     }
 
-    /** The observed number of every rule; one that was not read, or does not apply, waits for nothing. */
-    Map<Rule, Deduced<Uncertain>> all() {
-        Map<Rule, Deduced<Uncertain>> all = new EnumMap<>(Rule.class);
-        all.put(Rule.BED_OVER_BOARD, over(feed.deepest(), zone.height()));
-        all.put(Rule.BED_OVER_DESIGN, bedOverDesign());
-        all.put(Rule.FLOW_OVER_CAPACITY, feed.statedFlow().isKnown() ? feed.fill() : Deduced.nothing());
-        all.put(Rule.DRIVE_NEAR_RATING, feed == today ? runningShare() : runningShareAtLeast());
-        all.put(Rule.BED_BEHIND_BELT, today.bedSpeedRatio());
-        all.put(Rule.READINGS_DISAGREE, today.bedSpeedRatio());
-        all.put(Rule.ZONE_TOO_SHORT, over(zone.length(), zone.settlingLength()));
-        all.put(Rule.BOARDS_TOO_WIDE, over(zone.spacing(), widestSpacing()));
-        all.put(Rule.EDGE_TOO_SMALL, over(freeEdge(), leastEdge()));
-        all.put(Rule.BOARD_TOO_LOW_FOR_LUMPS, Deduced.from(() -> zone.height().get().min(zone.spacing().get())
-                .over(zone.number(Datum.LUMP_SIZE).get()),
-                zone.height(), zone.spacing(), zone.number(Datum.LUMP_SIZE)));
-        all.put(Rule.BELT_TOO_FAST, Deduced.from(zone.beltSpeed()::get, zone.beltSpeed(), tableSpeed()));
-        all.put(Rule.BED_NOT_SETTLED, bedNotSettled());
-        all.put(Rule.SEAL_DEFECT, sealDefects());
-        return all;
+    /** Whether what a rule observes changes with the feed. */
+    static boolean changesWithFeed(Rule rule) {
+        return switch (rule) {
+            case BED_OVER_BOARD, BED_OVER_DESIGN, FLOW_OVER_CAPACITY, DRIVE_NEAR_RATING, SKIRTS_OVER_BUDGET,
+                    BED_NOT_SETTLED -> true;
+            default -> false;
+        };
+    }
+
+    /** The observed number of a rule; one that was not read, or does not apply, waits for nothing. */
+    Deduced<Uncertain> of(Rule rule) {
+        return switch (rule) {
+            case BED_OVER_BOARD -> over(feed.deepest(), zone.height());
+            case BED_OVER_DESIGN -> bedOverDesign();
+            case FLOW_OVER_CAPACITY -> feed.statedFlow().isKnown() ? feed.fill() : Deduced.nothing();
+            case DRIVE_NEAR_RATING -> feed == today ? runningShare() : runningShareAtLeast();
+            case SKIRTS_OVER_BUDGET -> feed.driveShare();
+            case BED_BEHIND_BELT, READINGS_DISAGREE -> today.bedSpeedRatio();
+            case ZONE_TOO_SHORT -> over(zone.length(), zone.settlingLength());
+            case BOARDS_TOO_WIDE -> over(zone.spacing(), widestSpacing());
+            case EDGE_TOO_SMALL -> over(freeEdge(), leastEdge());
+            case BOARD_TOO_LOW_FOR_LUMPS -> boardOverLumps();
+            case BELT_TOO_FAST -> Deduced.from(zone.beltSpeed(), tableSpeed(), (speed, highest) -> speed);
+            case BED_NOT_SETTLED -> bedNotSettled();
+            case SEAL_DEFECT -> sealDefects();
+        };
     }
 
     /** The limits of a rule in the unit of what it observes. */
@@ -57,28 +63,31 @@ final class Observations {
         Limit limit = zone.settings().limits().of(rule);
         if (rule == Rule.BELT_TOO_FAST && tableSpeed().isKnown()) {
             double speed = tableSpeed().get();
-            return new Limit(times(limit.near(), speed), times(limit.overloaded(), speed), limit.on(),
+            return new Limit(Findings.times(limit.near(), speed), Findings.times(limit.overloaded(), speed), limit.on(),
                     limit.source(), limit.assumption());
         }
-        Optional<Double> budget = zone.zone().get(Datum.SKIRT_POWER_BUDGET).map(reading -> reading.value());
-        if (rule == Rule.SKIRTS_OVER_BUDGET && budget.isPresent()) {
-            return new Limit(limit.near(), OptionalDouble.of(budget.get()), limit.on(), limit.source(),
+        Deduced<Uncertain> budget = zone.number(Datum.SKIRT_POWER_BUDGET);
+        if (rule == Rule.SKIRTS_OVER_BUDGET && budget.isKnown()) {
+            return new Limit(limit.near(), OptionalDouble.of(budget.get().value()), limit.on(), limit.source(),
                     limit.assumption());
         }
         return limit;
     }
 
+    private Deduced<Uncertain> boardOverLumps() {
+        return Deduced.from(zone.height(), zone.spacing(), zone.number(Datum.LUMP_SIZE),
+                (height, spacing, lumps) -> height.min(spacing).over(lumps));
+    }
+
     private Deduced<Uncertain> bedOverDesign() {
-        Deduced<Uncertain> meanSquare = feed.meanSquare();
-        return Deduced.from(() -> meanSquare.get().squareRoot().over(zone.referenceDepth().get()),
-                meanSquare, zone.referenceDepth());
+        return Deduced.from(feed.meanSquare(), zone.referenceDepth(),
+                (square, reference) -> square.squareRoot().over(reference));
     }
 
     /** Running shaft power over rated power; only with a running electrical power. */
     private Deduced<Uncertain> runningShare() {
-        Deduced<Uncertain> shaft = runningShaftPower();
-        return zone.number(Datum.RUNNING_POWER).isKnown() ? over(shaft, zone.number(Datum.RATED_POWER))
-                : Deduced.nothing();
+        return zone.number(Datum.RUNNING_POWER).isKnown()
+                ? over(runningShaftPower(zone), zone.number(Datum.RATED_POWER)) : Deduced.nothing();
     }
 
     /**
@@ -91,68 +100,54 @@ final class Observations {
                 || feed.statedFlow().get().value() < today.statedFlow().get().value()) {
             return Deduced.nothing();
         }
-        Deduced<Uncertain> shaft = runningShaftPower();
-        return Deduced.from(() -> shaft.get().plus(feed.drivePower().get()).minus(today.drivePower().get())
-                .over(zone.number(Datum.RATED_POWER).get()),
-                shaft, feed.drivePower(), today.drivePower(), zone.number(Datum.RATED_POWER));
-    }
-
-    private Deduced<Uncertain> runningShaftPower() {
-        return runningShaftPower(zone);
+        return Deduced.from(runningShaftPower(zone), feed.drivePower(), today.drivePower(),
+                zone.number(Datum.RATED_POWER),
+                (shaft, then, now, rated) -> shaft.plus(then).minus(now).over(rated));
     }
 
     /** Shaft power of the drive while it was read; the reading is electrical. */
     static Deduced<Uncertain> runningShaftPower(ZoneFacts zone) {
-        Deduced<Uncertain> electrical = zone.number(Datum.RUNNING_POWER);
-        Deduced<Uncertain> efficiency = zone.number(Datum.MOTOR_EFFICIENCY);
-        return Deduced.from(() -> electrical.get().times(efficiency.get()), electrical, efficiency);
+        return Deduced.from(zone.number(Datum.RUNNING_POWER), zone.number(Datum.MOTOR_EFFICIENCY), Uncertain::times);
     }
 
     private Deduced<Uncertain> widestSpacing() {
-        Deduced<Uncertain> belt = zone.number(Datum.BELT_WIDTH);
-        return Deduced.from(() -> BoardPlacement.widestSpacing(belt.get(),
-                zone.zone().is(LoadingZone.Mark.FREE_FLOWING)), belt);
+        return Deduced.from(zone.number(Datum.BELT_WIDTH), belt -> BoardPlacement.widestSpacing(belt,
+                zone.zone().is(LoadingZone.Mark.FREE_FLOWING)));
     }
 
     private Deduced<Uncertain> leastEdge() {
-        Deduced<Uncertain> belt = zone.number(Datum.BELT_WIDTH);
-        return Deduced.from(() -> BoardPlacement.leastEdge(belt.get()), belt);
+        return Deduced.from(zone.number(Datum.BELT_WIDTH), BoardPlacement::leastEdge);
     }
 
     private Deduced<Uncertain> freeEdge() {
-        Deduced<Uncertain> belt = zone.number(Datum.BELT_WIDTH);
-        Deduced<Uncertain> trough = zone.number(Datum.TROUGH_ANGLE);
-        return Deduced.from(() -> BoardPlacement.freeEdge(belt.get(), zone.centreRoll().get(), zone.spacing().get(),
-                Section.wingRun(zone.spacing().get(), zone.centreRoll().get(), trough.get())),
-                belt, zone.centreRoll(), zone.spacing(), trough);
+        return Deduced.from(zone.number(Datum.BELT_WIDTH), zone.centreRoll(), zone.spacing(),
+                zone.number(Datum.TROUGH_ANGLE), (belt, roll, spacing, trough) -> BoardPlacement.freeEdge(belt, roll,
+                        spacing, Section.wingRun(spacing, roll, trough)));
     }
 
     private Deduced<Double> tableSpeed() {
-        return zone.zone().speedClass().map(speedClass -> Deduced.from(() ->
-                MaximumBeltSpeed.of(speedClass, zone.number(Datum.BELT_WIDTH).get().value()),
-                zone.number(Datum.BELT_WIDTH))).orElseGet(() -> Deduced.waitingFor("/material/speedClass"));
+        Optional<SpeedClass> material = zone.zone().speedClass();
+        return material.isEmpty() ? Deduced.waitingFor("/material/speedClass") : Deduced.from(
+                zone.number(Datum.BELT_WIDTH), belt -> MaximumBeltSpeed.of(material.get(), belt.value()));
     }
 
     /** Change over the last quarter over the mean depth; nothing from one station, or where the bed touches nowhere. */
     private Deduced<Uncertain> bedNotSettled() {
-        Deduced<Uncertain> mean = feed.meanDepth();
-        return Deduced.perhaps(() -> feed.profile().get().stations() < 2 || mean.get().value() == 0 ? Optional.empty()
-                : Optional.of(feed.profile().get().changeOverLastQuarter().over(mean.get())), mean);
+        return Deduced.flat(Deduced.from(feed.profile(), feed.meanDepth(), (bed, mean) -> bed.stations() < 2
+                || mean.value() == 0 ? Optional.empty() : Optional.of(bed.changeOverLastQuarter().over(mean))));
     }
 
     /** How many segments are not sound; a side that was not looked at may hide more, but takes none away. */
     private Deduced<Uncertain> sealDefects() {
-        long defects = zone.zone().seals().stream().map(segment -> segment.condition())
-                .filter(SealCondition::isDefect).count();
+        int defects = 0;
+        for (SealSegment segment : zone.zone().seals()) {
+            defects += segment.condition().isDefect() ? 1 : 0;
+        }
         return defects == 0 && !zone.sidesWithoutSeals().isEmpty() ? Deduced.waitingFor("/readings/seals")
                 : Deduced.known(Uncertain.exact(defects));
     }
 
     private static Deduced<Uncertain> over(Deduced<Uncertain> part, Deduced<Uncertain> whole) {
-        return Deduced.from(() -> part.get().over(whole.get()), part, whole);
-    }
-
-    private static OptionalDouble times(OptionalDouble limit, double factor) {
-        return limit.isPresent() ? OptionalDouble.of(limit.getAsDouble() * factor) : limit;
+        return Deduced.from(part, whole, Uncertain::over);
     }
 }

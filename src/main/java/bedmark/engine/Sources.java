@@ -5,29 +5,33 @@ import bedmark.engine.uncertainty.Reading;
 import bedmark.engine.uncertainty.Tape;
 import bedmark.engine.uncertainty.Uncertain;
 import java.util.ArrayList;
-import java.util.Collections;
 import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
 
 /** The numbers of one zone as they enter the computation, each reading once. */
 final class Sources {
+    private static final Datum[] DATA = Datum.values();
+    private static final List<Deduced<Uncertain>> ABSENT = List.of(DATA).stream()
+            .map(datum -> Deduced.<Uncertain>waitingFor(datum.pointer())).toList();
+
     private final LoadingZone zone;
     private final Settings settings;
     private final Tape tape;
-    private final boolean certain;
+    private final Function<Reading, Uncertain> taking;
     private final Uncertain beltGrip;
     private final Uncertain boardGrip;
     private final Uncertain sealRate;
-    private final List<Deduced<Uncertain>> numbers =
-            new ArrayList<>(Collections.nCopies(Datum.values().length, Deduced.nothing()));
+    private final List<Deduced<Uncertain>> numbers = new ArrayList<>(DATA.length);
 
-    private Sources(LoadingZone zone, Settings settings, boolean certain) {
+    private Sources(LoadingZone zone, Settings settings, Tape tape, Function<Reading, Uncertain> taking) {
         this.zone = zone;
         this.settings = settings;
-        this.certain = certain;
-        tape = new Tape(certain ? 0 : 160 + 32 * zone.stations().size() + 4 * zone.seals().size());
-        for (Datum datum : Datum.values()) {
-            numbers.set(datum.ordinal(), zone.get(datum).map(reading -> Deduced.known(take(reading)))
-                    .orElseGet(() -> Deduced.waitingFor(datum.pointer())));
+        this.tape = tape;
+        this.taking = taking;
+        for (Datum datum : DATA) {
+            Optional<Reading> reading = zone.get(datum);
+            numbers.add(reading.isPresent() ? Deduced.known(take(reading.get())) : ABSENT.get(datum.ordinal()));
         }
         beltGrip = take(settings.beltGrip());
         boardGrip = take(settings.boardGrip());
@@ -35,14 +39,28 @@ final class Sources {
                 Instrument.SEAL_RATE));
     }
 
-    /** The readings with their uncertainties. */
-    static Sources uncertain(LoadingZone zone, Settings settings) {
-        return new Sources(zone, settings, false);
+    private Sources(Sources other) {
+        zone = other.zone;
+        settings = other.settings;
+        tape = new Tape(0);
+        taking = reading -> Uncertain.exact(reading.value());
+        for (Deduced<Uncertain> number : other.numbers) {
+            numbers.add(number.map(Uncertain::certain));
+        }
+        beltGrip = other.beltGrip.certain();
+        boardGrip = other.boardGrip.certain();
+        sealRate = other.sealRate.certain();
     }
 
-    /** The readings taken as they stand. */
-    static Sources certain(LoadingZone zone, Settings settings) {
-        return new Sources(zone, settings, true);
+    /** The readings with their uncertainties. */
+    static Sources uncertain(LoadingZone zone, Settings settings) {
+        Tape tape = new Tape(192 + 16 * zone.stations().size());
+        return new Sources(zone, settings, tape, tape::take);
+    }
+
+    /** The same readings taken as they stand. */
+    Sources certain() {
+        return new Sources(this);
     }
 
     LoadingZone zone() {
@@ -63,12 +81,12 @@ final class Sources {
 
     /** The number, or what is assumed in its place; whoever asks so states the assumption. */
     Uncertain numberOr(Datum datum, double assumed) {
-        return number(datum).value().orElseGet(() -> Uncertain.exact(assumed));
+        return number(datum).isKnown() ? number(datum).get() : Uncertain.exact(assumed);
     }
 
     /** A number that stands in a row of its own; to be taken once, since each taking is a reading by itself. */
     Uncertain take(Reading reading) {
-        return certain ? Uncertain.exact(reading.value()) : tape.take(reading);
+        return taking.apply(reading);
     }
 
     /** μ1 of ISO 5048. */

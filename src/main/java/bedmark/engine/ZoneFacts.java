@@ -12,8 +12,9 @@ import bedmark.engine.seal.SealSegment;
 import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Uncertain;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
-import java.util.stream.Stream;
+import java.util.Set;
 
 /** What follows from a zone's readings whatever the feed: geometry, speed, seals, capacity, design. */
 final class ZoneFacts {
@@ -26,7 +27,7 @@ final class ZoneFacts {
     private final Deduced<Uncertain> beltSpeed;
     private final Deduced<Uncertain> spacing;
     private final Deduced<Uncertain> height;
-    private final Deduced<Uncertain> centreRoll;
+    private final Deduced<Uncertain> length;
     private final Deduced<Section> section;
     private final Deduced<Profile> profile;
     private final Deduced<Uncertain> sealDrag;
@@ -41,25 +42,75 @@ final class ZoneFacts {
         beltSpeed = findBeltSpeed();
         spacing = number(Datum.READ_SPACING).or(number(Datum.REGISTER_SPACING));
         height = number(Datum.READ_HEIGHT).or(number(Datum.REGISTER_HEIGHT));
-        centreRoll = isFlat() ? spacing : number(Datum.CENTRE_ROLL);
+        length = number(Datum.ZONE_LENGTH);
         section = section(spacing);
         profile = findProfile();
-        sealDrag = findSealDrag();
-        Deduced<Uncertain> usable = Deduced.perhaps(() -> OpenBelt.usableWidth(number(Datum.BELT_WIDTH).get()),
-                number(Datum.BELT_WIDTH));
-        Deduced<Uncertain> centre = isFlat() ? usable : centreRoll;
-        capacityArea = Deduced.from(() -> OpenBelt.area(usable.get(), centre.get(),
-                number(Datum.TROUGH_ANGLE).get(), number(Datum.SURCHARGE_ANGLE).get()),
-                usable, centre, number(Datum.TROUGH_ANGLE), number(Datum.SURCHARGE_ANGLE));
+        sealDrag = sealDrag(zone().seals());
+        capacityArea = findCapacityArea();
         designDepth = findDesignDepth();
-        referenceDepth = number(Datum.DESIGN_BED_DEPTH).or(Deduced.from(
-                () -> designDepth.get().max(number(Datum.BELT_WIDTH).get().times(SHARE_OF_WIDTH)),
-                designDepth, number(Datum.BELT_WIDTH)));
-        accelerationLength = Deduced.perhaps(() -> AccelerationLength.of(beltSpeed.get(), feedVelocity(),
-                sources.beltGrip(), sources.numberOr(Datum.INCLINE, 0)), beltSpeed);
-        settlingLength = Deduced.from(() -> SettlingLength.of(sources.numberOr(Datum.IMPACT_LENGTH, 0),
-                beltSpeed.get(), accelerationLength.value().orElse(Uncertain.ZERO),
-                zone().is(LoadingZone.Mark.HIGH_AIR_FLOW)), beltSpeed);
+        referenceDepth = number(Datum.DESIGN_BED_DEPTH).or(Deduced.from(designDepth, number(Datum.BELT_WIDTH),
+                (depth, belt) -> depth.max(belt.times(SHARE_OF_WIDTH))));
+        accelerationLength = findAccelerationLength();
+        settlingLength = findSettlingLength();
+    }
+
+    /** The same zone with its numbers taken as they stand. */
+    private ZoneFacts(ZoneFacts other) {
+        sources = other.sources.certain();
+        beltSpeed = other.beltSpeed.map(Uncertain::certain);
+        spacing = other.spacing.map(Uncertain::certain);
+        height = other.height.map(Uncertain::certain);
+        length = number(Datum.ZONE_LENGTH);
+        section = other.section.map(Section::certain);
+        profile = other.profile.map(Profile::certain);
+        sealDrag = other.sealDrag.map(Uncertain::certain);
+        capacityArea = other.capacityArea.map(Uncertain::certain);
+        designDepth = other.designDepth.map(Uncertain::certain);
+        referenceDepth = other.referenceDepth.map(Uncertain::certain);
+        accelerationLength = other.accelerationLength.map(Uncertain::certain);
+        settlingLength = other.settlingLength.map(Uncertain::certain);
+    }
+
+    /** The same zone after a change of one thing; the bed that comes of it is the business of who changes. */
+    private ZoneFacts(ZoneFacts other, Deduced<Uncertain> beltSpeed, Deduced<Uncertain> spacing,
+            Deduced<Uncertain> length, Deduced<Uncertain> sealDrag) {
+        this.beltSpeed = beltSpeed;
+        this.spacing = spacing;
+        this.length = length;
+        this.sealDrag = sealDrag;
+        sources = other.sources;
+        height = other.height;
+        section = spacing == other.spacing ? other.section : section(spacing);
+        profile = other.profile;
+        capacityArea = other.capacityArea;
+        designDepth = other.designDepth;
+        referenceDepth = other.referenceDepth;
+        accelerationLength = beltSpeed == other.beltSpeed ? other.accelerationLength : findAccelerationLength();
+        settlingLength = beltSpeed == other.beltSpeed ? other.settlingLength : findSettlingLength();
+    }
+
+    /** The zone without uncertainty, from which a change can be computed at little cost. */
+    ZoneFacts certain() {
+        return new ZoneFacts(this);
+    }
+
+    ZoneFacts withBeltSpeed(double speed) {
+        return new ZoneFacts(this, Deduced.known(Uncertain.exact(speed)), spacing, length, sealDrag);
+    }
+
+    ZoneFacts withSpacing(double width) {
+        return new ZoneFacts(this, beltSpeed, Deduced.known(Uncertain.exact(width)), length, sealDrag);
+    }
+
+    /** Seals are cut with the zone, each side in proportion. */
+    ZoneFacts withLength(double shorter) {
+        double share = shorter / length.get().value();
+        return new ZoneFacts(this, beltSpeed, spacing, Deduced.known(Uncertain.exact(shorter)),
+                sealDrag.map(drag -> drag.times(share)));
+    }
+
+    ZoneFacts withSeals(List<SealSegment> seals) {
+        return new ZoneFacts(this, beltSpeed, spacing, length, sealDrag(seals));
     }
 
     Sources sources() {
@@ -79,7 +130,7 @@ final class ZoneFacts {
     }
 
     Deduced<Uncertain> length() {
-        return number(Datum.ZONE_LENGTH);
+        return length;
     }
 
     Deduced<Uncertain> beltSpeed() {
@@ -99,8 +150,9 @@ final class ZoneFacts {
         return height;
     }
 
+    /** l3, all of the width between the boards on a flat belt. */
     Deduced<Uncertain> centreRoll() {
-        return centreRoll;
+        return isFlat() ? spacing : number(Datum.CENTRE_ROLL);
     }
 
     Deduced<Section> section() {
@@ -142,8 +194,9 @@ final class ZoneFacts {
 
     /** The sides of which no seal was recorded. */
     List<Side> sidesWithoutSeals() {
-        return Stream.of(Side.values())
-                .filter(side -> zone().seals().stream().noneMatch(segment -> segment.side() == side)).toList();
+        Set<Side> without = EnumSet.allOf(Side.class);
+        zone().seals().forEach(segment -> without.remove(segment.side()));
+        return List.copyOf(without);
     }
 
     private Deduced<Uncertain> findBeltSpeed() {
@@ -153,43 +206,55 @@ final class ZoneFacts {
         }
         if (begun(Datum.TIMED_REVOLUTIONS, Datum.TIMED_ELAPSED, Datum.TIMED_BELT_LENGTH)) {
             Deduced<Uncertain> belt = number(Datum.TIMED_BELT_LENGTH).or(number(Datum.BELT_LENGTH));
-            return Deduced.from(() -> BeltSpeed.timed(belt.get(), number(Datum.TIMED_REVOLUTIONS).get(),
-                    number(Datum.TIMED_ELAPSED).get()),
-                    belt, number(Datum.TIMED_REVOLUTIONS), number(Datum.TIMED_ELAPSED));
+            return Deduced.from(belt, number(Datum.TIMED_REVOLUTIONS), number(Datum.TIMED_ELAPSED), BeltSpeed::timed);
         }
         if (begun(Datum.PULLEY_DIAMETER, Datum.PULLEY_ROTATION)) {
-            return Deduced.from(() -> BeltSpeed.atPulley(number(Datum.PULLEY_DIAMETER).get(),
-                    number(Datum.PULLEY_ROTATION).get()),
-                    number(Datum.PULLEY_DIAMETER), number(Datum.PULLEY_ROTATION));
+            return Deduced.from(number(Datum.PULLEY_DIAMETER), number(Datum.PULLEY_ROTATION), BeltSpeed::atPulley);
         }
         return read;
     }
 
     private boolean begun(Datum... parts) {
-        return Stream.of(parts).anyMatch(part -> number(part).isKnown());
+        for (Datum part : parts) {
+            if (number(part).isKnown()) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private Deduced<Section> section(Deduced<Uncertain> width) {
         Deduced<Uncertain> surcharge = number(Datum.SURCHARGE_ANGLE);
         if (isFlat()) {
-            return Deduced.from(() -> Section.flat(width.get(), surcharge.get()), width, surcharge);
+            return Deduced.from(width, surcharge, Section::flat);
         }
-        Deduced<Uncertain> trough = number(Datum.TROUGH_ANGLE);
-        return Deduced.from(() -> Section.troughed(width.get(), number(Datum.CENTRE_ROLL).get(), trough.get(),
-                surcharge.get()), width, number(Datum.CENTRE_ROLL), trough, surcharge);
+        return Deduced.from(width, number(Datum.CENTRE_ROLL), number(Datum.TROUGH_ANGLE), surcharge,
+                Section::troughed);
     }
 
     private Deduced<Profile> findProfile() {
         List<Station> stations = zone().stations();
-        List<Deduced<Uncertain>> levels = stations.stream().map(this::level).toList();
-        List<Deduced<?>> inputs = new ArrayList<>(levels);
-        inputs.add(length());
+        List<Deduced<?>> inputs = new ArrayList<>(stations.size() + 1);
+        List<Uncertain> levels = new ArrayList<>(stations.size());
+        for (Station station : stations) {
+            Deduced<Uncertain> level = level(station);
+            inputs.add(level);
+            level.value().ifPresent(levels::add);
+        }
+        inputs.add(length);
         if (stations.isEmpty()) {
             inputs.add(Deduced.waitingFor(DEPTHS));
         }
-        return Deduced.from(() -> new Profile(length().get(),
-                stations.stream().map(station -> sources.take(station.position())).toList(),
-                levels.stream().map(Deduced::get).toList()), inputs.toArray(Deduced<?>[]::new));
+        return Deduced.fromAll(() -> Profile.of(length.get(), positions(stations), levels),
+                inputs.toArray(new Deduced<?>[0]));
+    }
+
+    private List<Uncertain> positions(List<Station> stations) {
+        List<Uncertain> positions = new ArrayList<>(stations.size());
+        for (Station station : stations) {
+            positions.add(sources.take(station.position()));
+        }
+        return positions;
     }
 
     /** The level after a reading: one at the board needs no section, one from the board's top only below the board. */
@@ -197,34 +262,49 @@ final class ZoneFacts {
         Uncertain raw = sources.take(station.raw());
         return switch (station.method()) {
             case AT_BOARD, WEAR_LINE -> Deduced.known(raw);
-            case AT_CENTRE -> Deduced.from(() -> section.get().levelOfCentreDepth(raw), section);
+            case AT_CENTRE -> Deduced.from(section, space -> space.levelOfCentreDepth(raw));
             case FROM_BOARD_TOP -> {
-                Deduced<Uncertain> depth = Deduced.from(() -> height.get().minus(raw), height);
-                boolean below = depth.value().filter(known -> known.value() < 0).isPresent();
-                yield below ? Deduced.from(() -> section.get().levelUnderBoardLine(raw.minus(height.get())), section)
-                        : depth;
+                Deduced<Uncertain> depth = Deduced.from(height, board -> board.minus(raw));
+                yield depth.isKnown() && depth.get().value() < 0 ? Deduced.from(section,
+                        space -> space.levelUnderBoardLine(raw.minus(height.get()))) : depth;
             }
         };
     }
 
-    private Deduced<Uncertain> findSealDrag() {
+    private Deduced<Uncertain> sealDrag(List<SealSegment> seals) {
         if (!sidesWithoutSeals().isEmpty()) {
             return Deduced.waitingFor("/readings/seals");
         }
         Uncertain rate = sources.sealRate();
         Uncertain sum = Uncertain.ZERO;
-        for (SealSegment segment : zone().seals()) {
+        for (SealSegment segment : seals) {
             double multiplier = settings().sealRates().multiplier(segment.type(), segment.condition());
             sum = sum.plus(SealDrag.of(rate, multiplier, sources.take(segment.length())));
         }
         return Deduced.known(sum);
     }
 
+    private Deduced<Uncertain> findCapacityArea() {
+        Deduced<Uncertain> usable = Deduced.flat(Deduced.from(number(Datum.BELT_WIDTH), OpenBelt::usableWidth));
+        return Deduced.from(usable, isFlat() ? usable : number(Datum.CENTRE_ROLL), number(Datum.TROUGH_ANGLE),
+                number(Datum.SURCHARGE_ANGLE), OpenBelt::area);
+    }
+
+    private Deduced<Uncertain> findAccelerationLength() {
+        return Deduced.flat(Deduced.from(beltSpeed, speed -> AccelerationLength.of(speed, feedVelocity(),
+                sources.beltGrip(), sources.numberOr(Datum.INCLINE, 0))));
+    }
+
+    private Deduced<Uncertain> findSettlingLength() {
+        return Deduced.from(beltSpeed, speed -> SettlingLength.of(sources.numberOr(Datum.IMPACT_LENGTH, 0), speed,
+                accelerationLength.isKnown() ? accelerationLength.get() : Uncertain.ZERO,
+                zone().is(LoadingZone.Mark.HIGH_AIR_FLOW)));
+    }
+
     /** Depth at design throughput, design speed and registered geometry; 0 where trough and crown carry it. */
     private Deduced<Uncertain> findDesignDepth() {
-        Deduced<Section> registered = section(number(Datum.REGISTER_SPACING));
-        return Deduced.from(() -> registered.get().level(number(Datum.DESIGN_THROUGHPUT).get()
-                .over(number(Datum.BULK_DENSITY).get()).over(number(Datum.DESIGN_SPEED).get())).max(Uncertain.ZERO),
-                registered, number(Datum.DESIGN_THROUGHPUT), number(Datum.BULK_DENSITY), number(Datum.DESIGN_SPEED));
+        return Deduced.from(section(number(Datum.REGISTER_SPACING)), number(Datum.DESIGN_THROUGHPUT),
+                number(Datum.BULK_DENSITY), number(Datum.DESIGN_SPEED), (registered, flow, density, speed) ->
+                        registered.level(flow.over(density).over(speed)).max(Uncertain.ZERO));
     }
 }

@@ -1,8 +1,9 @@
 package bedmark.engine.bed;
 
 import bedmark.engine.uncertainty.Uncertain;
-import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
+import java.util.function.DoubleUnaryOperator;
 import java.util.function.UnaryOperator;
 
 /**
@@ -14,23 +15,39 @@ import java.util.function.UnaryOperator;
  * ∫h  dx                = Δx (h0 + h1)/2
  * </pre>
  *
- * <p>and, where the level falls from p to −n within the segment, {@code Δx p³/(3 (p + n))} and
- * {@code Δx p²/(2 (p + n))} [D]. The square of the mean depth understates the mean of the square.
+ * <p>and as {@link Segment} says where the level crosses the board line. The square of the mean depth understates the
+ * mean of the square.
  */
 public final class Profile {
     private final Uncertain length;
-    private final List<Uncertain> positions;
-    private final List<Uncertain> levels;
+    private final Uncertain[] positions;
+    private final Uncertain[] levels;
+    /** Without uncertainty the integrals are plain sums. */
+    private final boolean certain;
 
     /**
      * @param length    of the zone (m), positive
      * @param positions of the stations (m), at least one, ascending within 0…length
      * @param levels    at the stations (m)
      */
-    public Profile(Uncertain length, List<Uncertain> positions, List<Uncertain> levels) {
+    public static Profile of(Uncertain length, List<Uncertain> positions, List<Uncertain> levels) {
+        return new Profile(length, positions.toArray(Uncertain[]::new), levels.toArray(Uncertain[]::new));
+    }
+
+    private Profile(Uncertain length, Uncertain[] positions, Uncertain[] levels) {
         this.length = length;
-        this.positions = List.copyOf(positions);
-        this.levels = List.copyOf(levels);
+        this.positions = positions;
+        this.levels = levels;
+        certain = length.isCertain() && areCertain(positions) && areCertain(levels);
+    }
+
+    private static boolean areCertain(Uncertain[] numbers) {
+        for (Uncertain number : numbers) {
+            if (!number.isCertain()) {
+                return false;
+            }
+        }
+        return true;
     }
 
     public Uncertain length() {
@@ -38,60 +55,82 @@ public final class Profile {
     }
 
     public int stations() {
-        return levels.size();
+        return levels.length;
     }
 
     /** Position of a station (m). */
     public Uncertain position(int station) {
-        return positions.get(station);
+        return positions[station];
     }
 
     /** Depth at the board at a station (m). */
     public Uncertain depth(int station) {
-        return levels.get(station).max(Uncertain.ZERO);
+        return levels[station].max(Uncertain.ZERO);
     }
 
     /** Level at a station (m). */
     public Uncertain level(int station) {
-        return levels.get(station);
+        return levels[station];
     }
 
     /** The same stations with other levels. */
     public Profile map(UnaryOperator<Uncertain> change) {
-        return new Profile(length, positions, levels.stream().map(change).toList());
+        Uncertain[] changed = new Uncertain[levels.length];
+        for (int i = 0; i < changed.length; i++) {
+            changed[i] = change.apply(levels[i]);
+        }
+        return new Profile(length, positions, changed);
+    }
+
+    /** The same profile without uncertainty. */
+    public Profile certain() {
+        Uncertain[] places = new Uncertain[positions.length];
+        for (int i = 0; i < places.length; i++) {
+            places[i] = positions[i].certain();
+        }
+        return new Profile(length.certain(), places, levels).map(Uncertain::certain);
     }
 
     /** The first part of the zone alone. */
     public Profile upTo(Uncertain shorter) {
-        List<Uncertain> places = new ArrayList<>();
-        List<Uncertain> kept = new ArrayList<>();
-        for (int i = 0; i < levels.size() && positions.get(i).value() < shorter.value(); i++) {
-            places.add(positions.get(i));
-            kept.add(levels.get(i));
+        int kept = 0;
+        while (kept < levels.length && positions[kept].value() < shorter.value()) {
+            kept++;
         }
-        places.add(shorter);
-        kept.add(levelAt(shorter));
-        return new Profile(shorter, places, kept);
+        Uncertain[] places = Arrays.copyOf(positions, kept + 1);
+        Uncertain[] remaining = Arrays.copyOf(levels, kept + 1);
+        places[kept] = shorter;
+        remaining[kept] = levelAt(shorter);
+        return new Profile(shorter, places, remaining);
     }
 
     /** ∫h² dx over the zone (m³). */
     public Uncertain integralOfSquare() {
-        return integral(level -> level.max(Uncertain.ZERO).square(), Profile::squareOverSegment);
+        return integral(Segment.SQUARE);
     }
 
     /** ∫h dx over the zone (m²). */
     public Uncertain integral() {
-        return integral(level -> level.max(Uncertain.ZERO), Profile::depthOverSegment);
+        return integral(Segment.DEPTH);
     }
 
     /** Mean level over the zone (m), from which the mean area follows. */
     public Uncertain meanLevel() {
-        return integral(UnaryOperator.identity(), (first, second) -> first.plus(second).over(2)).over(length);
+        return integral(Segment.LEVEL).over(length);
+    }
+
+    /** Mean of the square of the depth (m²) of the same stations with other levels (m), as a plain number. */
+    public double meanSquare(DoubleUnaryOperator change) {
+        return integral(Segment.SQUARE, change) / length.value();
     }
 
     /** The greatest depth at the board (m). */
     public Uncertain deepest() {
-        return levels.stream().reduce(Uncertain.ZERO, (most, level) -> level.max(most));
+        Uncertain most = Uncertain.ZERO;
+        for (Uncertain level : levels) {
+            most = level.max(most);
+        }
+        return most;
     }
 
     /** Greatest less least depth over the last quarter of the zone (m). */
@@ -99,8 +138,8 @@ public final class Profile {
         Uncertain start = length.times(0.75);
         Uncertain least = levelAt(start).max(Uncertain.ZERO);
         Uncertain most = least;
-        for (int i = 0; i < levels.size(); i++) {
-            if (positions.get(i).value() > start.value()) {
+        for (int i = 0; i < levels.length; i++) {
+            if (positions[i].value() > start.value()) {
                 least = least.min(depth(i));
                 most = most.max(depth(i));
             }
@@ -109,51 +148,57 @@ public final class Profile {
     }
 
     private Uncertain levelAt(Uncertain position) {
-        int last = levels.size() - 1;
-        if (position.value() >= positions.get(last).value()) {
-            return levels.get(last);
+        int last = levels.length - 1;
+        if (position.value() >= positions[last].value()) {
+            return levels[last];
         }
         int next = 0;
-        while (positions.get(next).value() < position.value()) {
+        while (positions[next].value() < position.value()) {
             next++;
         }
         if (next == 0) {
-            return levels.get(0);
+            return levels[0];
         }
-        Uncertain from = positions.get(next - 1);
-        Uncertain share = position.minus(from).over(positions.get(next).minus(from));
-        return levels.get(next - 1).plus(share.times(levels.get(next).minus(levels.get(next - 1))));
+        Uncertain from = positions[next - 1];
+        Uncertain share = position.minus(from).over(positions[next].minus(from));
+        return levels[next - 1].plus(share.times(levels[next].minus(levels[next - 1])));
     }
 
-    private Uncertain integral(UnaryOperator<Uncertain> constant, Mean mean) {
-        int last = levels.size() - 1;
-        Uncertain sum = positions.get(0).times(constant.apply(levels.get(0)));
-        for (int i = 0; i < last; i++) {
-            Uncertain run = positions.get(i + 1).minus(positions.get(i));
-            sum = sum.plus(run.times(mean.of(levels.get(i), levels.get(i + 1))));
+    /** The integral with its derivatives by length, positions and levels. */
+    private Uncertain integral(Segment.Mean mean) {
+        double value = integral(mean, level -> level);
+        if (certain) {
+            return Uncertain.exact(value);
         }
-        return sum.plus(length.minus(positions.get(last)).times(constant.apply(levels.get(last))));
+        int last = levels.length - 1;
+        Uncertain[] numbers = new Uncertain[2 * levels.length + 1];
+        double[] slopes = new double[numbers.length];
+        numbers[2 * levels.length] = length;
+        slopes[2 * levels.length] = mean.of(levels[last].value(), levels[last].value());
+        for (int i = 0; i <= last; i++) {
+            double level = levels[i].value();
+            double before = i == 0 ? level : levels[i - 1].value();
+            double after = i == last ? level : levels[i + 1].value();
+            double runBefore = positions[i].value() - (i == 0 ? 0 : positions[i - 1].value());
+            double runAfter = (i == last ? length : positions[i + 1]).value() - positions[i].value();
+            numbers[2 * i] = positions[i];
+            slopes[2 * i] = mean.of(before, level) - mean.of(level, after);
+            numbers[2 * i + 1] = levels[i];
+            slopes[2 * i + 1] = runBefore * (i == 0 ? 2 : 1) * mean.slope(level, before)
+                    + runAfter * (i == last ? 2 : 1) * mean.slope(level, after);
+        }
+        return Uncertain.composed(value, numbers, slopes);
     }
 
-    private static Uncertain squareOverSegment(Uncertain first, Uncertain second) {
-        if (first.value() >= 0 && second.value() >= 0) {
-            return first.square().plus(first.times(second)).plus(second.square()).over(3);
+    private double integral(Segment.Mean mean, DoubleUnaryOperator change) {
+        int last = levels.length - 1;
+        double before = change.applyAsDouble(levels[0].value());
+        double sum = positions[0].value() * mean.of(before, before);
+        for (int i = 1; i <= last; i++) {
+            double level = change.applyAsDouble(levels[i].value());
+            sum += (positions[i].value() - positions[i - 1].value()) * mean.of(before, level);
+            before = level;
         }
-        Uncertain high = first.max(second);
-        return high.value() <= 0 ? Uncertain.ZERO
-                : high.square().times(high).over(high.minus(first.min(second)).times(3));
-    }
-
-    private static Uncertain depthOverSegment(Uncertain first, Uncertain second) {
-        if (first.value() >= 0 && second.value() >= 0) {
-            return first.plus(second).over(2);
-        }
-        Uncertain high = first.max(second);
-        return high.value() <= 0 ? Uncertain.ZERO : high.square().over(high.minus(first.min(second)).times(2));
-    }
-
-    /** The mean of something over a segment, from the levels at its ends. */
-    private interface Mean {
-        Uncertain of(Uncertain first, Uncertain second);
+        return sum + (length.value() - positions[last].value()) * mean.of(before, before);
     }
 }

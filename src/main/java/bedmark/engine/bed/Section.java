@@ -35,6 +35,17 @@ public final class Section {
     private final Uncertain troughDepth;
     private final Uncertain carried;
 
+    private Section(Section other) {
+        spacing = other.spacing.certain();
+        centreRoll = other.centreRoll.certain();
+        wingRun = other.wingRun.certain();
+        sine = other.sine.certain();
+        cosine = other.cosine.certain();
+        crownSlope = other.crownSlope.certain();
+        troughDepth = other.troughDepth.certain();
+        carried = other.carried.certain();
+    }
+
     private Section(Uncertain spacing, Uncertain centreRoll, Uncertain troughAngle, Uncertain surchargeAngle) {
         this.spacing = spacing;
         this.centreRoll = centreRoll;
@@ -69,6 +80,11 @@ public final class Section {
         return new Section(spacing, spacing, Uncertain.ZERO, surchargeAngle);
     }
 
+    /** The same section without uncertainty. */
+    public Section certain() {
+        return new Section(this);
+    }
+
     /** s, the run of each wing inside the boards (m). */
     public static Uncertain wingRun(Uncertain spacing, Uncertain centreRoll, Uncertain troughAngle) {
         return spacing.minus(centreRoll).over(troughAngle.cosine().times(2)).max(Uncertain.ZERO);
@@ -82,6 +98,11 @@ public final class Section {
     /** Rise of the crown between the boards (m). */
     public Uncertain crownRise() {
         return spacing.times(crownSlope).over(4);
+    }
+
+    /** Depth that the area of trough and crown would have between the boards alone (m). */
+    public Uncertain carriedDepth() {
+        return carried.over(spacing);
     }
 
     /** Area of the bed at a level (m²). */

@@ -19,15 +19,26 @@ import java.util.Optional;
 public final class Tape {
     /** The place of a number that is on no tape. */
     static final int NOWHERE = -1;
+    private static final String TWO_COMPUTATIONS = "numbers of two computations do not mix";
+    /** What stands for the first reading that was taken; those after it count down from there. */
+    private static final int FIRST = -2;
     /** The tape of exact numbers: nothing is ever noted on it. */
     static final Tape NONE = new Tape(0);
 
+    /** Places of the operands, two for each operation; for a reading the first is {@code FIRST - its turn}. */
     private int[] operands;
     private double[] partials;
-    private double[] adjoints = {};
     private int length;
-    private final List<Reading> readings = new ArrayList<>();
-    private int[] readingPlaces = new int[32];
+    private Reading[] readings = new Reading[48];
+    private int taken;
+    /** Derivatives by what is still to be passed on; all 0 between two runs. */
+    private double[] adjoints = {};
+    /** One bit for each place that is still to be passed on. */
+    private long[] pending = {};
+    /** Readings behind the number of the last run by their turn, and its derivatives by them. */
+    private int[] behind = {};
+    private double[] derivatives = {};
+    private int found;
 
     /** @param expected about how many operations there will be; more are possible */
     public Tape(int expected) {
@@ -43,30 +54,45 @@ public final class Tape {
         if (reading.standardUncertainty() == 0) {
             return Uncertain.exact(reading.value());
         }
-        if (readings.size() == readingPlaces.length) {
-            readingPlaces = Arrays.copyOf(readingPlaces, 2 * readingPlaces.length);
+        if (taken == readings.length) {
+            readings = Arrays.copyOf(readings, 2 * taken);
         }
-        readingPlaces[readings.size()] = length;
-        readings.add(reading);
-        return new Uncertain(reading.value(), this, append(NOWHERE, 0, NOWHERE, 0));
+        readings[taken] = reading;
+        return new Uncertain.Noted(reading.value(), this, append(FIRST - taken++, 0, NOWHERE, 0));
     }
 
     /** The result of an operation with two operands. */
     static Uncertain note(double value, Uncertain a, double byA, Uncertain b, double byB) {
-        Tape tape = a.tape == NONE ? b.tape : a.tape;
+        Tape tape = a.tape() == NONE ? b.tape() : a.tape();
         if (tape == NONE) {
             return Uncertain.exact(value);
         }
-        if (b.tape != tape && b.tape != NONE) {
-            throw new IllegalArgumentException("numbers of two computations do not mix");
+        if (b.tape() != tape && b.tape() != NONE) {
+            throw new IllegalArgumentException(TWO_COMPUTATIONS);
         }
-        return new Uncertain(value, tape, tape.append(a.place, byA, b.place, byB));
+        return new Uncertain.Noted(value, tape, tape.append(a.place(), byA, b.place(), byB));
     }
 
     /** The result of an operation with one operand. */
     static Uncertain note(double value, Uncertain a, double byA) {
-        return a.tape == NONE ? Uncertain.exact(value)
-                : new Uncertain(value, a.tape, a.tape.append(a.place, byA, NOWHERE, 0));
+        return a.tape() == NONE ? Uncertain.exact(value)
+                : new Uncertain.Noted(value, a.tape(), a.tape().append(a.place(), byA, NOWHERE, 0));
+    }
+
+    /** The result of an operation with many operands: a sum of what each brings, noted one after another. */
+    static Uncertain note(double value, Uncertain[] numbers, double[] slopes) {
+        Tape tape = NONE;
+        int place = NOWHERE;
+        for (int i = 0; i < numbers.length; i++) {
+            if (numbers[i].tape() != NONE) {
+                if (tape != NONE && numbers[i].tape() != tape) {
+                    throw new IllegalArgumentException(TWO_COMPUTATIONS);
+                }
+                tape = numbers[i].tape();
+                place = tape.append(place, 1, numbers[i].place(), slopes[i]);
+            }
+        }
+        return tape == NONE ? Uncertain.exact(value) : new Uncertain.Noted(value, tape, place);
     }
 
     private int append(int a, double byA, int b, double byB) {
@@ -85,89 +111,109 @@ public final class Tape {
 
     /** The number with its standard uncertainty. */
     public Estimate estimate(Uncertain number) {
-        if (number.tape == NONE) {
-            return new Estimate(number.value(), 0);
-        }
         runBack(number);
-        double variance = 0;
-        for (int i = 0; i < readings.size(); i++) {
-            variance += variance(i, number.place);
-        }
-        return new Estimate(number.value(), Math.sqrt(variance));
+        return new Estimate(number.value(), Math.sqrt(variance()));
     }
 
-    /** The derivatives of the number by the readings that it depends on. */
-    public List<Sensitivity> sensitivities(Uncertain number) {
-        List<Sensitivity> found = new ArrayList<>();
-        if (number.tape != NONE) {
-            runBack(number);
-            for (int i = 0; i < readings.size() && readingPlaces[i] <= number.place; i++) {
-                if (adjoints[readingPlaces[i]] != 0) {
-                    found.add(new Sensitivity(readings.get(i), adjoints[readingPlaces[i]]));
-                }
+    /**
+     * The number with its standard uncertainty and with the reading that brings the most variance into it.
+     *
+     * @param beginning of the names of the readings that may lead
+     */
+    public Traced traced(Uncertain number, String beginning) {
+        runBack(number);
+        double most = 0;
+        Optional<String> leading = Optional.empty();
+        for (int i = found - 1; i >= 0; i--) {
+            double part = variance(i);
+            if (part > most && readings[behind[i]].name().startsWith(beginning)) {
+                most = part;
+                leading = Optional.of(readings[behind[i]].name());
             }
         }
-        return found;
+        return new Traced(new Estimate(number.value(), Math.sqrt(variance())), leading);
+    }
+
+    /** The derivatives of the number by the readings that it depends on, in the order in which they were taken. */
+    public List<Sensitivity> sensitivities(Uncertain number) {
+        runBack(number);
+        List<Sensitivity> sensitivities = new ArrayList<>(found);
+        for (int i = found - 1; i >= 0; i--) {
+            sensitivities.add(new Sensitivity(readings[behind[i]], derivatives[i]));
+        }
+        return sensitivities;
     }
 
     /** The share of each reading in the variance of the number, the greatest first; none for an exact number. */
     public List<Share> shares(Uncertain number) {
-        List<Sensitivity> sensitivities = sensitivities(number);
-        double variance = sensitivities.stream().mapToDouble(Sensitivity::variance).sum();
-        return variance == 0 ? List.of() : sensitivities.stream()
-                .map(sensitivity -> new Share(sensitivity.reading().name(), sensitivity.variance() / variance))
-                .sorted(Comparator.comparingDouble(Share::share).reversed())
-                .toList();
-    }
-
-    /** The reading, among those whose names begin so, that brings the most variance into the number. */
-    public Optional<String> leading(Uncertain number, String beginning) {
-        if (number.tape == NONE) {
-            return Optional.empty();
-        }
         runBack(number);
-        double most = 0;
-        Optional<String> leading = Optional.empty();
-        for (int i = 0; i < readings.size(); i++) {
-            double variance = variance(i, number.place);
-            if (variance > most && readings.get(i).name().startsWith(beginning)) {
-                most = variance;
-                leading = Optional.of(readings.get(i).name());
-            }
+        double variance = variance();
+        List<Share> shares = new ArrayList<>(found);
+        for (int i = found - 1; i >= 0 && variance > 0; i--) {
+            shares.add(new Share(readings[behind[i]].name(), variance(i) / variance));
         }
-        return leading;
+        shares.sort(Comparator.comparingDouble(Share::share).reversed());
+        return shares;
     }
 
-    private double variance(int reading, int resultPlace) {
-        if (readingPlaces[reading] > resultPlace) {
-            return 0;
+    private double variance() {
+        double variance = 0;
+        for (int i = found - 1; i >= 0; i--) {
+            variance += variance(i);
         }
-        double part = adjoints[readingPlaces[reading]] * readings.get(reading).standardUncertainty();
+        return variance;
+    }
+
+    private double variance(int turn) {
+        double part = derivatives[turn] * readings[behind[turn]].standardUncertainty();
         return part * part;
     }
 
     private void runBack(Uncertain number) {
-        if (number.tape != this) {
+        found = 0;
+        if (number.tape() == NONE) {
+            return;
+        }
+        if (number.tape() != this) {
             throw new IllegalArgumentException("a number of another computation");
         }
         if (adjoints.length < length) {
             adjoints = new double[operands.length / 2];
+            pending = new long[adjoints.length / Long.SIZE + 1];
         }
-        Arrays.fill(adjoints, 0, number.place, 0);
-        adjoints[number.place] = 1;
-        for (int place = number.place; place >= 0; place--) {
-            double adjoint = adjoints[place];
-            if (adjoint != 0) {
-                pass(2 * place, adjoint);
-                pass(2 * place + 1, adjoint);
+        if (behind.length < taken) {
+            behind = new int[readings.length];
+            derivatives = new double[readings.length];
+        }
+        pass(number.place(), 1);
+        for (int word = number.place() / Long.SIZE; word >= 0; word--) {
+            while (pending[word] != 0) {
+                int bit = Long.SIZE - 1 - Long.numberOfLeadingZeros(pending[word]);
+                pending[word] &= ~(1L << bit);
+                visit(word * Long.SIZE + bit);
             }
         }
     }
 
-    private void pass(int at, double adjoint) {
-        int operand = operands[at];
-        if (operand >= 0) {
-            adjoints[operand] += adjoint * partials[at];
+    private void visit(int place) {
+        double adjoint = adjoints[place];
+        adjoints[place] = 0;
+        int first = operands[2 * place];
+        if (first <= FIRST) {
+            if (adjoint != 0) {
+                behind[found] = FIRST - first;
+                derivatives[found++] = adjoint;
+            }
+            return;
+        }
+        pass(first, adjoint * partials[2 * place]);
+        pass(operands[2 * place + 1], adjoint * partials[2 * place + 1]);
+    }
+
+    private void pass(int operand, double adjoint) {
+        if (operand != NOWHERE) {
+            adjoints[operand] += adjoint;
+            pending[operand / Long.SIZE] |= 1L << operand;
         }
     }
 }

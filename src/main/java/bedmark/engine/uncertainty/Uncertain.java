@@ -8,30 +8,76 @@ package bedmark.engine.uncertainty;
  * <p>Each operation leaves its partial derivatives on the {@link Tape} of its operands; the gradient is read from
  * there when it is asked for. A number without readings behind it leaves nothing and costs nothing.
  */
-public final class Uncertain {
+public sealed class Uncertain permits Uncertain.Noted {
     /** Nothing. */
     public static final Uncertain ZERO = exact(0);
     /** One. */
     public static final Uncertain ONE = exact(1);
 
-    /** Its place on the tape; {@link Tape#NOWHERE} for an exact number. */
-    final int place;
-    final Tape tape;
     private final double value;
 
-    Uncertain(double value, Tape tape, int place) {
+    private Uncertain(double value) {
         this.value = value;
-        this.tape = tape;
-        this.place = place;
+    }
+
+    /** A number with readings behind it. */
+    static final class Noted extends Uncertain {
+        private final Tape tape;
+        private final int place;
+
+        Noted(double value, Tape tape, int place) {
+            super(value);
+            this.tape = tape;
+            this.place = place;
+        }
+
+        @Override
+        Tape tape() {
+            return tape;
+        }
+
+        @Override
+        int place() {
+            return place;
+        }
+    }
+
+    /** The tape on which it was noted. */
+    Tape tape() {
+        return Tape.NONE;
+    }
+
+    /** Its place on the tape; {@link Tape#NOWHERE} for an exact number. */
+    int place() {
+        return Tape.NOWHERE;
     }
 
     /** A number without uncertainty. */
     public static Uncertain exact(double value) {
-        return new Uncertain(value, Tape.NONE, Tape.NOWHERE);
+        return new Uncertain(value);
+    }
+
+    /**
+     * A formula of many numbers whose derivatives are written beside it.
+     *
+     * @param slopes derivatives of the value by each of the numbers
+     */
+    public static Uncertain composed(double value, Uncertain[] numbers, double[] slopes) {
+        return Tape.note(value, numbers, slopes);
     }
 
     public double value() {
         return value;
+    }
+
+    /** Whether no uncertain reading is behind it. */
+    public boolean isCertain() {
+        return tape() == Tape.NONE;
+    }
+
+    /** The same value without uncertainty. */
+    public Uncertain certain() {
+        return isCertain() ? this : exact(value);
     }
 
     public Uncertain plus(Uncertain other) {

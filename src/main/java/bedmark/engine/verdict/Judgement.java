@@ -27,11 +27,15 @@ public final class Judgement {
                 limit.source(), limit.assumption(), leading);
     }
 
-    /** Whether the observed value, taken as certain, is beyond the limit of warning or of overload. */
-    public static boolean isBroken(Rule rule, double observed, Limit limit) {
-        Estimate certain = new Estimate(observed, 0);
-        return probability(rule.sense(), certain, limit.near()).orElse(0) > 0
-                || probability(rule.sense(), certain, limit.overloaded()).orElse(0) > 0;
+    /** How the observed value stands, taken as certain: overloaded or near beyond the limit of that name. */
+    public static Level certain(Rule rule, double observed, OptionalDouble near, OptionalDouble overloaded) {
+        return isBeyond(rule.sense(), observed, overloaded) ? Level.OVERLOADED
+                : isBeyond(rule.sense(), observed, near) ? Level.NEAR : Level.WITHIN;
+    }
+
+    private static boolean isBeyond(Sense sense, double observed, OptionalDouble limit) {
+        return limit.isPresent() && (sense == Sense.OVER ? observed > limit.getAsDouble()
+                : observed < limit.getAsDouble());
     }
 
     private static Level level(OptionalDouble overNear, OptionalDouble overOverloaded, Certainty certainty) {

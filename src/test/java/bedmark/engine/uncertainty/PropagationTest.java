@@ -52,7 +52,7 @@ class PropagationTest {
         assertEquals(new Estimate(10, 0), tape.estimate(exact.times(2)));
         assertEquals(List.of(), tape.shares(exact));
         assertEquals(List.of(), tape.sensitivities(exact));
-        assertEquals(Optional.empty(), tape.leading(exact, "/"));
+        assertEquals(Optional.empty(), tape.traced(exact, "/").leading());
     }
 
     @Test
@@ -68,9 +68,9 @@ class PropagationTest {
     void theLeadingReadingIsLookedForAmongThoseAskedFor() {
         Uncertain model = tape.take(new Reading("/material/m", 1, 10));
         Uncertain sum = model.plus(x).plus(y.times(2));
-        assertEquals(Optional.of("/material/m"), tape.leading(sum, "/"));
-        assertEquals(Optional.of("/readings/y"), tape.leading(sum, "/readings/"));
-        assertEquals(Optional.empty(), tape.leading(model, "/readings/"));
+        assertEquals("/material/m", tape.traced(sum, "/").leading().orElseThrow());
+        assertEquals("/readings/y", tape.traced(sum, "/readings/").leading().orElseThrow());
+        assertEquals(Optional.empty(), tape.traced(model, "/readings/").leading());
     }
 
     @Test

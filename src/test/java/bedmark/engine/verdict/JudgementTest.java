@@ -1,8 +1,6 @@
 package bedmark.engine.verdict;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
-import static org.junit.jupiter.api.Assertions.assertFalse;
-import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.uncertainty.Estimate;
 import java.util.Optional;
@@ -56,15 +54,19 @@ class JudgementTest {
         Limit none = Limit.ofSite(OptionalDouble.empty(), OptionalDouble.empty());
         assertEquals(Level.WITHIN, Judgement.of(Rule.BED_OVER_BOARD, new Estimate(9, 1), none, Certainty.standard(),
                 Optional.empty()).level());
-        assertFalse(Judgement.isBroken(Rule.BED_OVER_BOARD, 9, none));
+        assertEquals(Level.WITHIN, certain(9, none));
     }
 
     @Test
     void brokenIsBeyondEitherLimit() {
-        assertFalse(Judgement.isBroken(Rule.BED_OVER_BOARD, 0.85, LIMIT));
-        assertTrue(Judgement.isBroken(Rule.BED_OVER_BOARD, 0.86, LIMIT));
-        assertTrue(Judgement.isBroken(Rule.BED_OVER_BOARD, 1.1,
-                Limit.ofSite(OptionalDouble.empty(), OptionalDouble.of(1))));
+        assertEquals(Level.WITHIN, certain(0.85, LIMIT));
+        assertEquals(Level.NEAR, certain(0.86, LIMIT));
+        assertEquals(Level.OVERLOADED, certain(1.01, LIMIT));
+        assertEquals(Level.OVERLOADED, certain(1.1, Limit.ofSite(OptionalDouble.empty(), OptionalDouble.of(1))));
+        assertEquals(Level.NEAR, Judgement.certain(Rule.BED_BEHIND_BELT, 0.7, OptionalDouble.of(0.8),
+                OptionalDouble.empty()));
+        assertEquals(Level.WITHIN, Judgement.certain(Rule.BED_BEHIND_BELT, 0.8, OptionalDouble.of(0.8),
+                OptionalDouble.empty()));
     }
 
     @Test
@@ -82,6 +84,10 @@ class JudgementTest {
         assertEquals("belt-too-fast", finding.code());
         assertEquals("m/s", finding.unit());
         assertEquals("slow-belt", finding.action());
+    }
+
+    private static Level certain(double observed, Limit limit) {
+        return Judgement.certain(Rule.BED_OVER_BOARD, observed, limit.near(), limit.overloaded());
     }
 
     private static Level level(double observed, double uncertainty) {

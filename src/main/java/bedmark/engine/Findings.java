@@ -1,0 +1,120 @@
+package bedmark.engine;
+
+import bedmark.engine.uncertainty.Tape;
+import bedmark.engine.uncertainty.Traced;
+import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.verdict.Finding;
+import bedmark.engine.verdict.Judgement;
+import bedmark.engine.verdict.Level;
+import bedmark.engine.verdict.Limit;
+import bedmark.engine.verdict.Rule;
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** The rules of one zone, judged at one feed. */
+final class Findings {
+    private static final String OF_THIS_WALK = "/readings/";
+    private static final Rule[] RULES = Rule.values();
+
+    private final Tape tape;
+    private final Settings settings;
+    private final Map<Rule, Finding> judged = new EnumMap<>(Rule.class);
+    private final List<Deduced<Uncertain>> numbers = new ArrayList<>(RULES.length);
+
+    private Findings(ZoneFacts zone) {
+        tape = zone.sources().tape();
+        settings = zone.settings();
+    }
+
+    /**
+     * Judges every rule at today's feed.
+     *
+     * @param load the conveyor's, where it is known
+     */
+    static Findings today(FeedFacts today, Optional<ConveyorLoad> load) {
+        Findings findings = new Findings(today.zone());
+        Observations observations = new Observations(today, today);
+        for (Rule rule : RULES) {
+            findings.judge(rule, observations, load);
+        }
+        return findings;
+    }
+
+    /** Judges the rules that change with the feed anew; the others stand as they are today. */
+    Findings atDesign(FeedFacts today, FeedFacts design, Optional<ConveyorLoad> load) {
+        Findings findings = new Findings(today.zone());
+        Observations observations = new Observations(today, design);
+        for (Rule rule : RULES) {
+            if (Observations.changesWithFeed(rule)) {
+                findings.judge(rule, observations, load);
+            } else if (judged.containsKey(rule)) {
+                findings.judged.put(rule, judged.get(rule));
+            }
+        }
+        return findings;
+    }
+
+    private void judge(Rule rule, Observations observations, Optional<ConveyorLoad> load) {
+        Deduced<Uncertain> observed = observations.of(rule);
+        if (rule != Rule.SKIRTS_OVER_BUDGET) {
+            numbers.add(observed);
+        }
+        Limit limit = observations.limit(rule);
+        if (!limit.on()) {
+            return;
+        }
+        if (rule == Rule.SKIRTS_OVER_BUDGET) {
+            load.ifPresent(sum -> judge(sum, observed, limit));
+        } else if (observed.isKnown()) {
+            Traced traced = tape.traced(observed.get(), OF_THIS_WALK);
+            judged.put(rule, Judgement.of(rule, traced.estimate(), limit, settings.certainty(), traced.leading()));
+        }
+    }
+
+    /** A sum that lacks zones can only show that the limit is passed, never that it is kept. */
+    private void judge(ConveyorLoad load, Deduced<Uncertain> ownPart, Limit limit) {
+        Optional<String> leading = ownPart.value().flatMap(part -> tape.traced(part, OF_THIS_WALK).leading());
+        Finding finding = Judgement.of(Rule.SKIRTS_OVER_BUDGET, load.share(), limit, settings.certainty(), leading);
+        if (load.lacking() == 0 || finding.level() != Level.WITHIN) {
+            judged.put(Rule.SKIRTS_OVER_BUDGET, finding);
+        }
+    }
+
+    /** Every rule that could be evaluated, once, in their order. */
+    List<Finding> all() {
+        return List.copyOf(judged.values());
+    }
+
+    boolean has(Rule rule) {
+        return judged.containsKey(rule);
+    }
+
+    /** What was observed, known or not. */
+    List<Deduced<Uncertain>> numbers() {
+        return numbers;
+    }
+
+    /** The worst level of all, or that of a zone which lacks a required reading. */
+    Level level(boolean lacking) {
+        Level level = lacking ? Level.INCOMPLETE : Level.WITHIN;
+        for (Finding finding : judged.values()) {
+            level = level.or(finding.level());
+        }
+        return level;
+    }
+
+    /** The reading that leads in the first rule which is undecided. */
+    Optional<String> repeat() {
+        return judged.values().stream().filter(finding -> finding.level() == Level.UNDECIDED)
+                .flatMap(finding -> finding.leadingReading().stream()).findFirst();
+    }
+
+    /** A limit of one rule as it stands for a whole that it is a share of. */
+    static OptionalDouble times(OptionalDouble limit, double whole) {
+        return limit.isPresent() ? OptionalDouble.of(limit.getAsDouble() * whole) : limit;
+    }
+}

@@ -103,7 +103,11 @@ final class Assumptions {
                         Double.toString(rates.multiplier(segment.type(), segment.condition()))));
             }
         }
-        if (rates.rate() != SealRates.CONVENTION && zone.sealDrag().isKnown()) {
+        boolean fitted = zone.method() == DragMethod.SITE && zone.number(Datum.SITE_SEAL_RATE).isKnown();
+        if (fitted) {
+            all.add(Assumption.of("seal-rate-fitted",
+                    Double.toString(zone.number(Datum.SITE_SEAL_RATE).get().value())));
+        } else if (rates.rate() != SealRates.CONVENTION && zone.sealDrag().isKnown()) {
             all.add(Assumption.of("seal-rate-site", Double.toString(rates.rate())));
         }
     }

@@ -85,7 +85,12 @@ public enum Datum {
     /** Surcharge angle on the belt (rad). */
     SURCHARGE_ANGLE("/material/surchargeAngle", Domain.ANGLE, Instrument.SURCHARGE),
     /** Coefficient of friction between material and board. */
-    WALL_FRICTION("/material/wallFriction", Domain.NOT_NEGATIVE, Instrument.WALL_FRICTION);
+    WALL_FRICTION("/material/wallFriction", Domain.NOT_NEGATIVE, Instrument.WALL_FRICTION),
+
+    /** The site's own factor for this material and conveyor (lbf/(ft·in²)); it brings its own uncertainty. */
+    SITE_FACTOR("/plant/siteFactor", Domain.POSITIVE, Instrument.EXACT),
+    /** Drag per length of seal that the site fitted beside it (N/m); it brings its own uncertainty. */
+    SITE_SEAL_RATE("/plant/siteSealRate", Domain.POSITIVE, Instrument.EXACT);
 
     private static final Map<String, Datum> BY_POINTER =
             Stream.of(values()).collect(Collectors.toUnmodifiableMap(Datum::pointer, Function.identity()));

@@ -3,6 +3,7 @@ package bedmark.engine;
 import bedmark.engine.bed.Profile;
 import bedmark.engine.drag.DragMethod;
 import bedmark.engine.drag.RankinePressure;
+import bedmark.engine.drag.SiteFactor;
 import bedmark.engine.drag.SpecialResistance;
 import bedmark.engine.drag.TabulatedFactor;
 import bedmark.engine.flow.LoadingForce;
@@ -73,8 +74,7 @@ final class FeedFacts {
 
     /** The method in use: the site's, else the tabulated factor where the material has one, else Rankine's. */
     DragMethod method() {
-        return zone.settings().method().orElse(
-                zone.number(Datum.SKIRT_FRICTION_FACTOR).isKnown() ? DragMethod.TABULATED : DragMethod.RANKINE);
+        return zone.method();
     }
 
     ZoneFacts zone() {
@@ -120,7 +120,7 @@ final class FeedFacts {
     Map<DragMethod, Deduced<Uncertain>> methods() {
         Map<DragMethod, Deduced<Uncertain>> methods = new EnumMap<>(DragMethod.class);
         for (DragMethod method : DragMethod.values()) {
-            methods.put(method, method == method() ? materialDrag : drag(method));
+            methods.put(method, method == method() ? materialDrag : alternative(method));
         }
         return methods;
     }
@@ -130,7 +130,14 @@ final class FeedFacts {
             case TABULATED -> tabulated();
             case RANKINE -> rankine();
             case ISO_5048 -> specialResistance();
+            case SITE -> Deduced.from(zone.number(Datum.SITE_FACTOR), integralOfSquare, SiteFactor::drag);
         };
+    }
+
+    /** By a method that does not decide; only where the site's own does is its factor waited for. */
+    private Deduced<Uncertain> alternative(DragMethod method) {
+        return method == DragMethod.SITE && !zone.number(Datum.SITE_FACTOR).isKnown() ? Deduced.nothing()
+                : drag(method);
     }
 
     Deduced<Uncertain> materialDrag() {

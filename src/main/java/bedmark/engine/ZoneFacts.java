@@ -3,6 +3,7 @@ package bedmark.engine;
 import bedmark.engine.bed.Profile;
 import bedmark.engine.bed.Section;
 import bedmark.engine.bed.Station;
+import bedmark.engine.drag.DragMethod;
 import bedmark.engine.flow.AccelerationLength;
 import bedmark.engine.flow.BeltSpeed;
 import bedmark.engine.flow.OpenBelt;
@@ -188,6 +189,12 @@ final class ZoneFacts {
         return settlingLength;
     }
 
+    /** The method in use: the site's, else the tabulated factor where the material has one, else Rankine's. */
+    DragMethod method() {
+        return settings().method().orElse(
+                number(Datum.SKIRT_FRICTION_FACTOR).isKnown() ? DragMethod.TABULATED : DragMethod.RANKINE);
+    }
+
     boolean isFlat() {
         return zone().get(Datum.TROUGH_ANGLE).filter(angle -> angle.value() == 0).isPresent();
     }
@@ -271,11 +278,17 @@ final class ZoneFacts {
         };
     }
 
+    /** The rate that the site fitted where its own method decides, else that of its table. */
+    private Uncertain sealRate() {
+        Deduced<Uncertain> fitted = number(Datum.SITE_SEAL_RATE);
+        return method() == DragMethod.SITE && fitted.isKnown() ? fitted.get() : sources.sealRate();
+    }
+
     private Deduced<Uncertain> sealDrag(List<SealSegment> seals) {
         if (!sidesWithoutSeals().isEmpty()) {
             return Deduced.waitingFor("/readings/seals");
         }
-        Uncertain rate = sources.sealRate();
+        Uncertain rate = sealRate();
         Uncertain sum = Uncertain.ZERO;
         for (SealSegment segment : seals) {
             double multiplier = settings().sealRates().multiplier(segment.type(), segment.condition());

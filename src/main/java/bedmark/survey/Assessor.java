@@ -28,6 +28,7 @@ import java.util.UUID;
 public final class Assessor {
     private final Register register;
     private final Settings settings;
+    private final SiteFactors factors;
 
     /** A survey with what the engine found. */
     public record Assessed(Survey survey, Assessment assessment) {
@@ -41,6 +42,12 @@ public final class Assessor {
     public Assessor(Register register) {
         this.register = register;
         this.settings = SiteSettings.of(register.document());
+        this.factors = SiteSettings.sound(() -> SiteFactors.of(register, settings.instruments()));
+    }
+
+    /** The factors that the site fitted from its own drives, or why it could not. */
+    public SiteFactors siteFactors() {
+        return factors;
     }
 
     public Settings settings() {
@@ -53,7 +60,7 @@ public final class Assessor {
      * @throws Refused where a reading cannot be; the place is a pointer within the survey
      */
     public LoadingZone zone(Survey survey) {
-        LoadingZone zone = ZoneMapping.map(survey, register, settings.instruments());
+        LoadingZone zone = ZoneMapping.map(survey, register, settings.instruments(), factors);
         try {
             Engine.check(zone);
         } catch (ImpossibleReading e) {
@@ -114,11 +121,29 @@ public final class Assessor {
                 .orElse(zones.size());
         try {
             Assessment assessment = Engine.assessConveyor(zones, all - zones.size(), settings).get(0);
-            return ZoneMapping.takesDepthsAtBoard(survey)
-                    ? assessment.with(Assumption.of("depth-method-at-board")) : assessment;
+            for (Assumption assumption : beforehand(survey)) {
+                assessment = assessment.with(assumption);
+            }
+            return assessment;
         } catch (ImpossibleReading e) {
             throw refused(e);
         }
+    }
+
+    /** What was taken for granted before the engine saw the zone. */
+    private List<Assumption> beforehand(Survey survey) {
+        List<Assumption> assumptions = new ArrayList<>();
+        if (ZoneMapping.takesDepthsAtBoard(survey)) {
+            assumptions.add(Assumption.of("depth-method-at-board"));
+        }
+        factors.of(survey, register).ifPresent(row -> {
+            row.unfit().ifPresent(unfit -> assumptions.add(Assumption.of("site-factor-unfit", unfit.code())));
+            String day = row.fittedAt().toLocalDate().toString();
+            row.factor().ifPresent(factor -> assumptions.add(row.pairs() == 0
+                    ? Assumption.of("site-factor-entered", day)
+                    : Assumption.of("site-factor-fitted", day, Integer.toString(row.pairs()))));
+        });
+        return assumptions;
     }
 
     /** A companion that cannot be is judged in its own place; here it is as good as not surveyed. */

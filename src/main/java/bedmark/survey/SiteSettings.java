@@ -24,6 +24,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
+import java.util.function.Supplier;
 
 /**
  * What a site decided, read from its register: {@code limits}, {@code sealRates}, {@code instruments} and
@@ -44,11 +45,22 @@ final class SiteSettings {
      *                 within the plant
      */
     static Settings of(Branch plant) {
-        try {
+        return sound(() -> {
             Settings settings = grips(plant, Settings.standard().with(limits(plant)).with(certainty(plant))
                     .with(sealRates(plant)).with(instruments(plant)));
             return plant.text("method").map(code -> settings.with(
                     word(DragMethod::ofCode, code, Pointer.of("method")))).orElse(settings);
+        });
+    }
+
+    /**
+     * Reads something of the plant.
+     *
+     * @throws Refused also for a number that cannot be
+     */
+    static <T> T sound(Supplier<T> reading) {
+        try {
+            return reading.get();
         } catch (ImpossibleReading e) {
             throw new Refused(Defect.in(e.readingName().replaceFirst("^/plant", ""), e.code(),
                     e.arguments().toArray(String[]::new)), e);

@@ -41,12 +41,12 @@ final class ZoneMapping {
     private static final String DEPTH_METHOD = "depthMethod";
 
     private final Map<String, Branch> sources;
-    private final Instruments instruments;
+    private final Taking taking;
     private final List<String> unfinished = new ArrayList<>();
 
     private ZoneMapping(Map<String, Branch> sources, Instruments instruments) {
         this.sources = sources;
-        this.instruments = instruments;
+        taking = new Taking(instruments);
     }
 
     /**
@@ -55,15 +55,24 @@ final class ZoneMapping {
      * @throws Refused where a value has the wrong kind or dimension, or a word is unknown; the place is a pointer
      *                 within the survey, or below {@code /conveyor}, {@code /transfer}, {@code /material}
      */
-    static LoadingZone map(Survey survey, Register register, Instruments instruments) {
+    static LoadingZone map(Survey survey, Register register, Instruments instruments, SiteFactors factors) {
         Register.Transfer transfer = register.transfer(survey.transfer()).orElseThrow(() ->
                 new Refused(Defect.at(Pointer.of("transfer"), "transfer-unknown", survey.transfer())));
-        return new ZoneMapping(Map.of(
+        LoadingZone zone = new ZoneMapping(Map.of(
                 "readings", survey.readings(),
                 "transfer", transfer.document(),
                 "conveyor", register.conveyorOf(transfer).document(),
                 "material", material(survey, transfer, register).map(Register.Material::document)
                         .orElse(Branch.EMPTY)), instruments).zone();
+        return factors.of(survey, register).map(row -> withFactor(zone, row)).orElse(zone);
+    }
+
+    private static LoadingZone withFactor(LoadingZone zone, SiteFactors.Row row) {
+        Map<Datum, Reading> data = new EnumMap<>(Datum.class);
+        data.putAll(zone.data());
+        row.factor().ifPresent(factor -> data.put(Datum.SITE_FACTOR, factor));
+        row.sealRate().ifPresent(rate -> data.put(Datum.SITE_SEAL_RATE, rate));
+        return zone.with(data);
     }
 
     /** The material that really ran, else the one that the register expects. */
@@ -93,7 +102,7 @@ final class ZoneMapping {
             case BULK_DENSITY -> Optional.of(Dimension.DENSITY);
             case SKIRT_POWER_BUDGET -> Optional.of(Dimension.RATIO);
             case TIMED_REVOLUTIONS, DRIVE_EFFICIENCY, MOTOR_EFFICIENCY, LOADED_HOURS, SKIRT_FRICTION_FACTOR,
-                    WALL_FRICTION -> Optional.empty();
+                    WALL_FRICTION, SITE_FACTOR, SITE_SEAL_RATE -> Optional.empty();
         };
     }
 
@@ -125,9 +134,10 @@ final class ZoneMapping {
         return below(Pointer.of(source), () -> sources.get(source).flag(key)).orElse(false);
     }
 
+    /** What the documents of the survey hold; what was fitted from the site's drives stands elsewhere. */
     private Optional<Reading> number(Datum datum) {
         Pointer place = Pointer.parse(datum.pointer());
-        Branch source = sources.get(place.tokens().get(0));
+        Branch source = sources.getOrDefault(place.tokens().get(0), Branch.EMPTY);
         Pointer inside = new Pointer(place.tokens().subList(1, place.tokens().size()));
         Optional<Node> node = source.at(inside).filter(found -> !(found instanceof Node.Blank));
         if (node.isEmpty()) {
@@ -142,7 +152,7 @@ final class ZoneMapping {
                 .map(dimension -> holder.quantity(place.last())
                         .map(quantity -> reading(place, quantity, dimension, datum.instrument())))
                 .orElseGet(() -> holder.number(place.last())
-                        .map(value -> instruments.reading(place.toString(), value.doubleValue(), datum.instrument()))));
+                        .map(value -> taking.plain(place.toString(), value.doubleValue(), datum.instrument()))));
     }
 
     /** A budget is a share of the rated power, or a power; one without a rated power waits for it. */
@@ -151,22 +161,15 @@ final class ZoneMapping {
         if (dimension == Dimension.POWER) {
             return below(Pointer.of("conveyor"), () -> sources.get("conveyor").quantity("ratedPower"))
                     .map(Quantity::si).filter(power -> power > 0)
-                    .map(rated -> instruments.reading(place.toString(), budget.si() / rated, Instrument.EXACT));
+                    .map(rated -> taking.plain(place.toString(), budget.si() / rated, Instrument.EXACT));
         } else if (dimension == Dimension.RATIO) {
-            return Optional.of(instruments.reading(place.toString(), budget.si(), Instrument.EXACT));
+            return Optional.of(taking.plain(place.toString(), budget.si(), Instrument.EXACT));
         }
         throw new Refused(Defect.at(place.child("unit"), "unit-of-wrong-kind", budget.unit().code()));
     }
 
     private Reading reading(Pointer place, Quantity quantity, Dimension dimension, Instrument instrument) {
-        if (quantity.unit().dimension() != dimension) {
-            throw new Refused(Defect.at(Pointer.of(place.last(), "unit"), "unit-of-wrong-kind",
-                    quantity.unit().code()));
-        }
-        double value = quantity.si();
-        return quantity.standardUncertaintySi()
-                .map(uncertainty -> new Reading(place.toString(), value, uncertainty))
-                .orElseGet(() -> instruments.reading(place.toString(), value, instrument));
+        return taking.reading(place.toString(), quantity, dimension, instrument);
     }
 
     private List<Station> stations() {
@@ -184,27 +187,12 @@ final class ZoneMapping {
             if (position.isPresent() && depth.isPresent()) {
                 stations.add(below(place, () -> new Station(
                         reading(place.child(POSITION), position.get(), Dimension.LENGTH, Instrument.EXACT),
-                        reading(place.child(DEPTH), depth.get(), Dimension.LENGTH, instrument(depth.get(), method)),
+                        reading(place.child(DEPTH), depth.get(), Dimension.LENGTH, Taking.depth(depth.get(), method)),
                         method)));
             }
         }
         stations.sort(Comparator.comparingDouble(station -> station.position().value()));
         return stations;
-    }
-
-    /** A depth on a running belt is an estimate whatever its mark says; so is a wear line, which records history. */
-    private static Instrument instrument(Quantity depth, DepthMethod method) {
-        return switch (quality(depth, method)) {
-            case MEASURED -> Instrument.DEPTH_MEASURED;
-            case ESTIMATED -> Instrument.DEPTH_ESTIMATED;
-            case SUSPECT -> Instrument.DEPTH_SUSPECT;
-        };
-    }
-
-    private static Quality quality(Quantity depth, DepthMethod method) {
-        Quality marked = depth.quality().orElse(Quality.MEASURED);
-        boolean sighted = method == DepthMethod.WEAR_LINE || depth.beltState().filter(BeltState::running).isPresent();
-        return sighted && marked == Quality.MEASURED ? Quality.ESTIMATED : marked;
     }
 
     private List<SealSegment> seals() {

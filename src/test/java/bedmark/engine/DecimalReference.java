@@ -65,6 +65,7 @@ final class DecimalReference {
         out.put("impliedThroughputKgPerS", implied);
         out.put("tabulated", mul(number("/material/skirtFrictionFactor"),
                 mul(square, div(POUND_FORCE, mul(FOOT, mul(INCH, INCH))))));
+        out.put("site", mul(number("/plant/siteFactor"), mul(square, div(POUND_FORCE, mul(FOOT, mul(INCH, INCH))))));
         BigDecimal sine = sin(number("/material/angleOfRepose"));
         out.put("rankine", mul(number("/material/wallFriction"), mul(div(sub(BigDecimal.ONE, sine),
                 add(BigDecimal.ONE, sine)), mul(density, mul(GRAVITY, square)))));

@@ -81,6 +81,7 @@ class DecimalReferenceTest {
         data.remove(Datum.TIMED_BELT_LENGTH);
         data.remove(Datum.PULLEY_DIAMETER);
         data.remove(Datum.SKIRT_POWER_BUDGET);
+        Zones.put(data, Datum.SITE_FACTOR, 0.02 + 0.2 * random.nextDouble());
         Zones.put(data, Datum.FEED_VELOCITY, Math.abs(data.get(Datum.FEED_VELOCITY).value()));
         Zones.put(data, Datum.TROUGH_ANGLE, Math.max(0.1, data.get(Datum.TROUGH_ANGLE).value()));
         double belt = data.get(Datum.BELT_WIDTH).value();

@@ -7,7 +7,6 @@ import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
 import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.slices;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
-import com.tngtech.archunit.core.domain.JavaClass;
 import com.tngtech.archunit.core.domain.JavaClasses;
 import com.tngtech.archunit.core.domain.JavaModifier;
 import com.tngtech.archunit.core.importer.ClassFileImporter;
@@ -17,7 +16,6 @@ import org.junit.jupiter.api.Test;
 
 /** Holds what the engine may know: nothing but the language, and its parts nothing of the whole. */
 class EngineArrowsTest {
-    private static final String DRAG = "bedmark.engine.drag";
     private static final JavaClasses ENGINE = new ClassFileImporter()
             .withImportOption(ImportOption.Predefined.DO_NOT_INCLUDE_TESTS).importPackages("bedmark.engine");
 
@@ -36,16 +34,6 @@ class EngineArrowsTest {
                 .should().dependOnClassesThat(resideInAPackage("bedmark.engine"))
                 .because("a formula can be read and tested alone").check(ENGINE);
         slices().matching("bedmark.engine.(*)..").should().beFreeOfCycles().check(ENGINE);
-    }
-
-    @Test
-    void dragMethodsDoNotKnowEachOther() {
-        List<String> seen = ENGINE.stream().filter(method -> method.getPackageName().equals(DRAG))
-                .flatMap(method -> method.getDirectDependenciesFromSelf().stream()
-                        .map(dependency -> dependency.getTargetClass().getBaseComponentType())
-                        .filter(target -> target.getPackageName().equals(DRAG) && !target.equals(method)))
-                .map(JavaClass::getName).toList();
-        assertEquals(List.of(), seen, "methods are compared side by side, never built upon each other");
     }
 
     @Test

@@ -36,7 +36,7 @@ class EveryInputTest {
         for (int i = 0; i < 3_000; i++) {
             LoadingZone zone = Zones.random(random);
             Settings settings = random.nextInt(4) == 0
-                    ? Settings.standard().with(DragMethod.values()[random.nextInt(3)]) : Settings.standard();
+                    ? Settings.standard().with(DragMethod.values()[random.nextInt(4)]) : Settings.standard();
             sound(Engine.assess(zone, settings));
         }
     }

@@ -97,6 +97,8 @@ final class Zones {
         maybe(random, data, Datum.REGISTER_HEIGHT, between(random, 0.1, 1.2));
         maybe(random, data, Datum.IMPACT_LENGTH, between(random, 0, 4));
         maybe(random, data, Datum.LUMP_SIZE, between(random, 0.005, 0.5));
+        maybe(random, data, Datum.SITE_FACTOR, between(random, 0.005, 0.3));
+        maybe(random, data, Datum.SITE_SEAL_RATE, between(random, 5, 200));
         LoadingZone zone = LoadingZone.UNKNOWN.with(data).withStations(stations(random, length, height))
                 .withSeals(seals(random, length));
         for (LoadingZone.Mark mark : LoadingZone.Mark.values()) {

@@ -31,6 +31,7 @@ class EveryWordTest {
     private static final Pattern DEFECT =
             Pattern.compile("(?:Defect\\.(?:at|in)\\([^;]*?|ImpossibleReading\\()\"([a-z0-9]+(?:-[a-z0-9]+)+)\"");
     private static final Pattern ASSUMPTION = Pattern.compile("Assumption\\.of\\(\"([a-z-]+)\"");
+    private static final Pattern UNFIT = Pattern.compile("unfit\\(\"([a-z-]+)\"");
     private static final Pattern REMEDY = Pattern.compile("remedy\\(\"([a-z-]+)\"|seals\\(\"([a-z-]+)\"");
 
     private static List<String> sources() {
@@ -78,6 +79,7 @@ class EveryWordTest {
     @Test
     void everyAssumptionAndRemedyHasASentence() {
         requireAll(named(ASSUMPTION).stream().map(code -> "assumption." + code));
+        requireAll(named(UNFIT).stream().map(code -> "assumption.word." + code));
         requireAll(named(REMEDY).stream().map(code -> "remedy." + code));
     }
 

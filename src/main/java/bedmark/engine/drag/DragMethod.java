@@ -10,7 +10,9 @@ public enum DragMethod {
     /** Rankine wall pressure. */
     RANKINE("rankine"),
     /** Special resistance of ISO 5048 and DIN 22101. */
-    ISO_5048("iso-5048");
+    ISO_5048("iso-5048"),
+    /** The site's own factor, fitted from readings of its drives. */
+    SITE("site");
 
     private final String code;
 

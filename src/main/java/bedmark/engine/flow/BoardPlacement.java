@@ -1,6 +1,7 @@
 package bedmark.engine.flow;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Where skirtboards may stand on a belt.
@@ -14,6 +15,20 @@ import bedmark.engine.uncertainty.Uncertain;
  * <p>B belt width, b1 spacing, l3 centre roll, s run of the wing inside the boards (m).
  */
 public final class BoardPlacement {
+    /** The widest spacing as it is printed. */
+    public static final Formula WIDEST = Formula.of("widest-spacing", "bw", "2 · B/3", "S8");
+
+    /** The same for free-flowing material. */
+    public static final Formula WIDEST_FREE_FLOWING = Formula.of("widest-spacing", "bw", "B/2", "S8");
+
+    /** The least edge as it is printed; 0.9 in in metres. */
+    public static final Formula LEAST_EDGE = Formula.of("least-edge", "em",
+            "0.055 · B + 0.02286", "S12");
+
+    /** The free edge as it is printed. */
+    public static final Formula FREE_EDGE = Formula.of("free-edge", "e",
+            "(B − min(l3, b1))/2 − s", "D");
+
     private BoardPlacement() {
     }
 

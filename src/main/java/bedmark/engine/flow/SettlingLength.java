@@ -1,6 +1,7 @@
 package bedmark.engine.flow;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Length that a loading zone needs for its bed and its dust to settle.
@@ -11,6 +12,14 @@ import bedmark.engine.uncertainty.Uncertain;
  * material (0.5 m³/s or more) [S9]; v belt speed (m/s); l_b acceleration length (m); 3 ft [R].
  */
 public final class SettlingLength {
+    /** The length as it is printed. */
+    public static final Formula FORMULA = Formula.of("settling-length", "Ls",
+            "max(Li + 1.2 · v, lb, 0.9144)", "S9, R");
+
+    /** The same where much air comes with the material. */
+    public static final Formula FORMULA_HIGH_AIR = Formula.of("settling-length", "Ls",
+            "max(Li + 1.8 · v, lb, 0.9144)", "S9, R");
+
     private static final Uncertain LEAST = Uncertain.exact(3 * 0.3048);
 
     private SettlingLength() {

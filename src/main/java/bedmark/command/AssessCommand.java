@@ -51,10 +51,13 @@ final class AssessCommand implements Callable<Integer> {
 
         @Option(names = "--csv", description = "Print CSV (RFC 4180).")
         private boolean csv;
+
+        @Option(names = "--explain", description = "Print the working of each survey as a calculation sheet.")
+        private boolean explain;
     }
 
-    /** The surveys of one bundle with their assessments. */
-    record Judged(Bundle bundle, List<Assessed> surveys) {
+    /** The surveys of one bundle with their assessments and who made them. */
+    record Judged(Bundle bundle, Assessor assessor, List<Assessed> surveys) {
     }
 
     AssessCommand(Surroundings surroundings) {
@@ -76,8 +79,7 @@ final class AssessCommand implements Callable<Integer> {
     private int assess(Path from, UnitSystem system) throws Exception {
         List<Judged> judged = new ArrayList<>();
         for (BundleSource.Named named : BundleSource.read(from)) {
-            judged.add(in(named.file(), () -> new Judged(named.bundle(),
-                    new Assessor(named.bundle().register()).assess(named.bundle().surveys()))));
+            judged.add(in(named.file(), () -> judge(named.bundle())));
         }
         List<Assessed> all = judged.stream().flatMap(one -> one.surveys().stream()).toList();
         Wording wording = new Wording(surroundings.words(), system);
@@ -87,11 +89,20 @@ final class AssessCommand implements Callable<Integer> {
             surroundings.out().print(new String(json, StandardCharsets.UTF_8));
         } else if (output.csv) {
             new AssessmentTable(wording).print(judged, notice, surroundings.out());
+        } else if (output.explain) {
+            ExplainedText text = new ExplainedText(wording, notice);
+            judged.forEach(one -> text.print(one.bundle().register(), one.assessor(), one.surveys(),
+                    one.bundle().forms(), surroundings.out()));
         } else {
             new AssessmentText(wording).print(judged, notice, surroundings.out());
         }
         surroundings.out().flush();
         return exitCode(all);
+    }
+
+    private Judged judge(Bundle bundle) {
+        Assessor assessor = new Assessor(bundle.register());
+        return new Judged(bundle, assessor, assessor.assess(bundle.surveys()));
     }
 
     private static int exitCode(List<Assessed> all) {

@@ -29,6 +29,7 @@ import java.util.Optional;
  */
 final class Explanation {
     private static final double GRAVITY = 9.806_65;
+    private static final Formula OF_FLOW = SpecialResistance.FORMULA.withSigns(Map.of("Iv", "(Q/ρ)"));
 
     private final ZoneFacts zone;
     private final FeedFacts today;
@@ -123,10 +124,7 @@ final class Explanation {
     private void flow() {
         if (today.area().isKnown()) {
             Profile bed = zone.profile().get();
-            boolean touches = bed.level(0).value() >= 0;
-            for (int i = 1; i < bed.stations(); i++) {
-                touches &= bed.level(i).value() >= 0;
-            }
+            boolean touches = ProfileFormula.touches(bed);
             if (!touches) {
                 sheet.step(ProfileFormula.level(bed), bed.meanLevel(), "m");
             }
@@ -153,11 +151,13 @@ final class Explanation {
         }
         sheet.step(Result.ACCELERATION_LENGTH.key(), AccelerationLength.FORMULA, zone.accelerationLength(), "m");
         if (methods.get(DragMethod.ISO_5048).isKnown()) {
-            Uncertain flow = today.statedFlow().isKnown() ? today.statedFlow().get() : today.impliedFlow().get();
-            sheet.step(ZoneFormulas.VOLUME_FLOW, flow.over(zone.number(Datum.BULK_DENSITY).get()), "m3/s");
-            sheet.step(SpecialResistance.WITHIN, SpecialResistance.within(zone.accelerationLength().get(),
-                    zone.length().get()), "m");
-            sheet.step(key(DragMethod.ISO_5048), SpecialResistance.FORMULA, methods.get(DragMethod.ISO_5048), "N");
+            Uncertain acceleration = zone.accelerationLength().get();
+            Uncertain within = SpecialResistance.within(acceleration, zone.length().get());
+            boolean whole = within.value() == acceleration.value();
+            if (!whole) {
+                sheet.step(SpecialResistance.WITHIN, within, "m");
+            }
+            sheet.step(key(DragMethod.ISO_5048), whole ? OF_FLOW.withSigns(Map.of("lw", "lb")) : OF_FLOW, methods.get(DragMethod.ISO_5048), "N");
         }
         sheet.step(key(DragMethod.SITE), SiteFactor.FORMULA, methods.get(DragMethod.SITE), "N");
         sheet.step(Result.MATERIAL_DRAG.key(), ZoneFormulas.materialDrag(today.method()), today.materialDrag(), "N");
@@ -207,18 +207,22 @@ final class Explanation {
             Uncertain belt = zone.number(Datum.BELT_WIDTH).get();
             sheet.step(belt.value() <= 2 ? OpenBelt.USABLE : OpenBelt.USABLE_WIDE,
                     OpenBelt.usableWidth(belt).orElseThrow(), "m");
-            sheet.step(zone.isFlat() ? OpenBelt.AREA_FLAT : OpenBelt.AREA, zone.capacityArea().get(), "m2");
+            boolean wings = !zone.isFlat()
+                    && zone.centreRoll().get().value() < OpenBelt.usableWidth(belt).orElseThrow().value();
+            sheet.step(!wings ? OpenBelt.AREA_FLAT : OpenBelt.AREA, zone.capacityArea().get(), "m2");
         }
         sheet.step(Result.FILL.key(), ZoneFormulas.FILL, today.fill(), "1");
     }
 
     private void design() {
-        if (zone.designDepth().isKnown()) {
+        boolean other = zone.number(Datum.READ_SPACING).isKnown() || !zone.section().isKnown();
+        if (zone.designDepth().isKnown() && other) {
             Uncertain spacing = zone.number(Datum.REGISTER_SPACING).get();
             sheet.input("br", Deduced.known(spacing), "m", Datum.REGISTER_SPACING.pointer());
             section(zone.registeredSection().get(), ZoneFormulas.REGISTERED, spacing);
         }
-        sheet.step(Result.DESIGN_DEPTH.key(), ZoneFormulas.DESIGN_DEPTH, zone.designDepth(), "m");
+        sheet.step(Result.DESIGN_DEPTH.key(), other ? ZoneFormulas.DESIGN_DEPTH
+                : ZoneFormulas.DESIGN_DEPTH.withSigns(Map.of("br", "b1", "A0r", "A0")), zone.designDepth(), "m");
         sheet.step(Result.REFERENCE_DEPTH.key(), zone.number(Datum.DESIGN_BED_DEPTH).isKnown()
                 ? ZoneFormulas.REFERENCE_REGISTERED : ZoneFormulas.REFERENCE_DEPTH, zone.referenceDepth(), "m");
     }
@@ -271,7 +275,8 @@ final class Explanation {
             if (!zone.section().isKnown()) {
                 sheet.step(Section.WING_RUN, run, "m");
             }
-            sheet.step(BoardPlacement.FREE_EDGE, BoardPlacement.freeEdge(belt, zone.centreRoll().get(),
+            sheet.step(zone.centreRoll().get().value() < zone.spacing().get().value() ? BoardPlacement.FREE_EDGE
+                    : BoardPlacement.FREE_EDGE_ON_CENTRE, BoardPlacement.freeEdge(belt, zone.centreRoll().get(),
                     zone.spacing().get(), run), "m");
         }
     }

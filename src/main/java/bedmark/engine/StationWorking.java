@@ -6,12 +6,16 @@ import bedmark.engine.bed.Section;
 import bedmark.engine.bed.Station;
 import bedmark.engine.uncertainty.Uncertain;
 import bedmark.engine.working.Formula;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Map;
 
 /** How each station's level came from its reading. */
 final class StationWorking {
     private final ZoneFacts zone;
     private final WorkingSheet sheet;
+    /** Written after all that they need, so that one formula stands together. */
+    private final List<Runnable> levels = new ArrayList<>();
 
     StationWorking(ZoneFacts zone, WorkingSheet sheet) {
         this.zone = zone;
@@ -24,6 +28,7 @@ final class StationWorking {
             sheet.input("x" + (i + 1), Deduced.known(bed.position(i)), "m", station.position().name());
             station(i + 1, station, bed.level(i));
         }
+        levels.forEach(Runnable::run);
     }
 
     private void station(int number, Station station, Uncertain level) {
@@ -39,7 +44,7 @@ final class StationWorking {
             case FROM_BOARD_TOP -> {
                 sheet.input("f" + number, Deduced.known(zone.sources().take(station.raw())), "m", name);
                 if (zone.height().get().value() >= station.raw().value()) {
-                    sheet.step(ProfileFormula.OF_FREEBOARD.withSigns(signs), level, "m");
+                    level(ProfileFormula.OF_FREEBOARD, level, signs);
                 } else {
                     underBoardLine(raw.minus(zone.height().get().certain()), level, signs);
                 }
@@ -55,12 +60,11 @@ final class StationWorking {
         }
         Uncertain run = section.runOfCentreDepth(depth);
         if (depth.value() - section.troughDepth().value() - section.crownRise().value() >= 0) {
-            sheet.step(Section.OF_CENTRE.withSigns(signs), level, "m");
+            level(Section.OF_CENTRE, level, signs);
         } else if (run.value() >= 0) {
             onWings(Section.RUN_OF_CENTRE, run, level, signs);
         } else {
-            sheet.step((depth.value() > 0 ? Section.LEVEL_ON_CENTRE : Section.LEVEL_OF_NOTHING).withSigns(signs),
-                    level, "m");
+            level(depth.value() > 0 ? Section.LEVEL_ON_CENTRE : Section.LEVEL_OF_NOTHING, level, signs);
         }
     }
 
@@ -72,7 +76,7 @@ final class StationWorking {
         }
         troughDepth(section);
         boolean empty = section.riseUnderBoardLine(drop).value() <= 0;
-        sheet.step((empty ? Section.LEVEL_OF_NOTHING : Section.LEVEL_ON_CENTRE_OF_DROP).withSigns(signs), level, "m");
+        level(empty ? Section.LEVEL_OF_NOTHING : Section.LEVEL_ON_CENTRE_OF_DROP, level, signs);
     }
 
     private void troughDepth(Section section) {
@@ -88,6 +92,10 @@ final class StationWorking {
 
     private void onWings(Formula runFormula, Uncertain run, Uncertain level, Map<String, String> signs) {
         sheet.step(runFormula.withSigns(signs), run, "m");
-        sheet.step(Section.LEVEL_ON_WINGS.withSigns(signs), level, "m");
+        level(Section.LEVEL_ON_WINGS, level, signs);
+    }
+
+    private void level(Formula formula, Uncertain level, Map<String, String> signs) {
+        levels.add(() -> sheet.step(formula.withSigns(signs), level, "m"));
     }
 }

@@ -13,7 +13,6 @@ final class ZoneFormulas {
     static final Formula IMPLIED_FLOW = Formula.of("implied-flow", "Qi", "ρ · v · A", "D");
     static final Formula FLOW_OF_BED = Formula.of("flow-of-bed", "Q", "Qi", "A");
     static final Formula BED_SPEED_RATIO = Formula.of("bed-speed-ratio", "β", "Q/Qi", "D");
-    static final Formula VOLUME_FLOW = Formula.of("volume-flow", "Iv", "Q/ρ", "D");
     static final Formula SKIRT_DRAG = Formula.of("skirt-drag", "F", "Fm + Fs", "D");
     static final Formula SKIRT_POWER = Formula.of("skirt-power", "P", "F · v", "D");
     static final Formula DRIVE_POWER = Formula.of("drive-power", "Pd", "P/ηd", "D");

@@ -22,25 +22,25 @@ public final class ProfileFormula {
     public static Formula square(Profile bed) {
         return new Formula("integral-of-square", "J2",
                 sum(bed, ProfileFormula::squareAt, ProfileFormula::meanSquare),
-                "Σ Δx · (h0² + h0 · h1 + h1²)/3", "D");
+                "Σ Δx · (h² + h · h′ + h′²)/3", "D");
     }
 
     /** ∫h dx. */
     public static Formula depth(Profile bed) {
         return new Formula("integral-of-depth", "J1", sum(bed, ProfileFormula::depthAt, ProfileFormula::meanDepth),
-                "Σ Δx · (h0 + h1)/2", "D");
+                "Σ Δx · (h + h′)/2", "D");
     }
 
     /** Mean level, which counts a bed that lies below the boards. */
     public static Formula level(Profile bed) {
         return new Formula("mean-level", "hn", "(" + sum(bed, (here, station) -> here,
                 (run, ends) -> run + " · (" + ends.from() + " + " + ends.to() + ")/2") + ")/L",
-                "(Σ Δx · (h0 + h1)/2)/L", "D");
+                "(Σ Δx · (h + h′)/2)/L", "D");
     }
 
     /** The greatest depth. */
     public static Formula deepest(Profile bed) {
-        return Formula.of("deepest-depth", "hmax", "max(" + signs(0, bed.stations()) + ", 0)", "D");
+        return Formula.of("deepest-depth", "hmax", "max(" + signs(bed) + (touches(bed) ? ")" : ", 0)"), "D");
     }
 
     /** Level where the last quarter of the zone begins. */
@@ -59,14 +59,20 @@ public final class ProfileFormula {
     public static Formula changeOverLastQuarter(Profile bed) {
         double start = bed.length().times(0.75).value();
         String depths = IntStream.range(0, bed.stations()).filter(i -> bed.position(i).value() > start)
-                .mapToObj(i -> ", max(h" + (i + 1) + ", 0)").collect(Collectors.joining());
-        String all = "max(hq, 0)" + depths;
+                .mapToObj(i -> touches(bed) ? ", h" + (i + 1) : ", max(h" + (i + 1) + ", 0)")
+                .collect(Collectors.joining());
+        String all = (touches(bed) ? "hq" : "max(hq, 0)") + depths;
         return Formula.of("change-over-last-quarter", "Δh", depths.isEmpty() ? all + " − " + all
                 : "max(" + all + ") − min(" + all + ")", "D");
     }
 
-    private static String signs(int from, int to) {
-        return IntStream.range(from, to).mapToObj(i -> "h" + (i + 1)).collect(Collectors.joining(", "));
+    /** Whether the bed reaches the boards at every station. */
+    public static boolean touches(Profile bed) {
+        return IntStream.range(0, bed.stations()).allMatch(station -> touches(bed, station));
+    }
+
+    private static String signs(Profile bed) {
+        return IntStream.range(0, bed.stations()).mapToObj(i -> "h" + (i + 1)).collect(Collectors.joining(", "));
     }
 
     /** The levels at the ends of a stretch: their signs, and whether the bed reaches the boards there. */

@@ -27,7 +27,9 @@ public final class BoardPlacement {
 
     /** The free edge as it is printed. */
     public static final Formula FREE_EDGE = Formula.of("free-edge", "e",
-            "(B − min(l3, b1))/2 − s", "D");
+            "(B − l3)/2 − s", "D");
+    /** The same where the boards stand over the centre roll. */
+    public static final Formula FREE_EDGE_ON_CENTRE = Formula.of("free-edge", "e", "(B − b1)/2", "D");
 
     private BoardPlacement() {
     }

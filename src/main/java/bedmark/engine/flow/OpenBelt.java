@@ -26,10 +26,9 @@ public final class OpenBelt {
 
     /** The area as it is printed. */
     public static final Formula AREA = Formula.of("open-belt-area", "S",
-            "(min(l3, b) + (b − min(l3, b)) · cos λ)² · tan θ/6 + "
-                    + "(min(l3, b) + (b − min(l3, b))/2 · cos λ) · (b − min(l3, b))/2 · sin λ", "S5, R");
+            "(l3 + (b − l3) · cos λ)² · tan θ/6 + (l3 + (b − l3)/2 · cos λ) · (b − l3)/2 · sin λ", "S5, R");
 
-    /** The same on a flat belt. */
+    /** The same on a flat belt, or where the centre roll takes all of the usable width. */
     public static final Formula AREA_FLAT = Formula.of("open-belt-area", "S", "b² · tan θ/6", "S5, R");
 
     private OpenBelt() {

@@ -2,18 +2,23 @@ package bedmark.command;
 
 import static bedmark.command.BedmarkCommand.in;
 
+import bedmark.document.Pointer;
+import bedmark.document.Refused;
 import bedmark.engine.verdict.Level;
 import bedmark.json.AssessmentWriter;
 import bedmark.json.JsonWriter;
+import bedmark.json.ReferenceData;
 import bedmark.quantity.UnitSystem;
 import bedmark.survey.Assessor;
 import bedmark.survey.Assessor.Assessed;
 import bedmark.survey.Bundle;
+import bedmark.survey.Register;
 import bedmark.wording.Wording;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.ArgGroup;
 import picocli.CommandLine.Command;
@@ -43,6 +48,10 @@ final class AssessCommand implements Callable<Integer> {
     @Option(names = "--units", paramLabel = "metric|us", defaultValue = "metric",
             description = "Units of the text and the CSV (default: ${DEFAULT-VALUE}); JSON is always SI.")
     private String units;
+
+    @Option(names = "--reference", paramLabel = "DIR",
+            description = "Reference files of a site in the place of the shipped ones; what a plant decides wins.")
+    private Path reference;
 
     /** One way of printing. */
     static final class Output {
@@ -77,9 +86,10 @@ final class AssessCommand implements Callable<Integer> {
     }
 
     private int assess(Path from, UnitSystem system) throws Exception {
+        Optional<ReferenceData> data = Optional.ofNullable(reference).map(ReferenceData::read);
         List<Judged> judged = new ArrayList<>();
         for (BundleSource.Named named : BundleSource.read(from)) {
-            judged.add(in(named.file(), () -> judge(named.bundle())));
+            judged.add(in(named.file(), () -> judge(named.bundle(), data)));
         }
         List<Assessed> all = judged.stream().flatMap(one -> one.surveys().stream()).toList();
         Wording wording = new Wording(surroundings.words(), system);
@@ -100,8 +110,10 @@ final class AssessCommand implements Callable<Integer> {
         return exitCode(all);
     }
 
-    private Judged judge(Bundle bundle) {
-        Assessor assessor = new Assessor(bundle.register());
+    private Judged judge(Bundle bundle, Optional<ReferenceData> data) {
+        Assessor assessor = data.map(own -> new Assessor(Refused.below(Pointer.of("plant"), () ->
+                new Register(own.filled(bundle.register().document()))), own.settings()))
+                .orElseGet(() -> new Assessor(bundle.register()));
         return new Judged(bundle, assessor, assessor.assess(bundle.surveys()));
     }
 

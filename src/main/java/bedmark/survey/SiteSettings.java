@@ -28,7 +28,7 @@ import java.util.function.Supplier;
 
 /**
  * What a site decided, read from its register: {@code limits}, {@code sealRates}, {@code instruments} and
- * {@code method} of the plant. What it leaves out keeps the default of the engineering page; a limit of a rule that
+ * {@code method} of the plant. What it leaves out keeps the reference's number; a limit of a rule that
  * this version does not know is kept in the document and not used.
  */
 final class SiteSettings {
@@ -41,13 +41,15 @@ final class SiteSettings {
     /**
      * The settings of a plant.
      *
+     * @param base what holds where the plant decides nothing
      * @throws Refused where a row names what the engine does not know, or a number cannot be; the place is a pointer
      *                 within the plant
      */
-    static Settings of(Branch plant) {
+    static Settings of(Branch plant, Settings base) {
         return sound(() -> {
-            Settings settings = grips(plant, Settings.standard().with(limits(plant)).with(certainty(plant))
-                    .with(sealRates(plant)).with(instruments(plant)));
+            Settings settings = grips(plant, base.with(limits(plant, base.limits()))
+                    .with(certainty(plant, base.certainty())).with(sealRates(plant, base.sealRates()))
+                    .with(instruments(plant, base.instruments())));
             return plant.text("method").map(code -> settings.with(
                     word(DragMethod::ofCode, code, Pointer.of("method")))).orElse(settings);
         });
@@ -67,9 +69,9 @@ final class SiteSettings {
         }
     }
 
-    private static Limits limits(Branch plant) {
+    private static Limits limits(Branch plant, Limits base) {
         Branch rows = plant.branch(LIMITS).orElse(Branch.EMPTY);
-        Limits limits = Limits.standard();
+        Limits limits = base;
         for (String code : rows.members().keySet()) {
             Optional<Rule> named = Rule.ofCode(code);
             if (named.isEmpty()) {
@@ -78,13 +80,14 @@ final class SiteSettings {
             Pointer place = Pointer.of(LIMITS, code);
             Rule rule = named.get();
             Branch row = below(place, () -> rows.branch(code).orElse(Branch.EMPTY));
-            Limit known = rule.limit();
+            Limit known = base.of(rule);
             OptionalDouble near = below(place, () -> number(row, "near", known.near()));
             OptionalDouble overloaded = below(place, () -> number(row, "overloaded", known.overloaded()));
             boolean moved = !near.equals(known.near()) || !overloaded.equals(known.overloaded());
             Limit limit = moved ? Limit.ofSite(near, overloaded) : known;
-            boolean enabled = below(place, () -> row.flag("enabled")).orElse(true);
-            limits = limits.with(rule, enabled ? limit : limit.off());
+            boolean enabled = below(place, () -> row.flag("enabled")).orElse(known.on());
+            limits = limits.with(rule, new Limit(limit.near(), limit.overloaded(), enabled, limit.source(),
+                    limit.assumption()));
         }
         return limits;
     }
@@ -99,16 +102,15 @@ final class SiteSettings {
                         onBoards.orElse(settings.boardGrip().value()));
     }
 
-    private static Certainty certainty(Branch plant) {
+    private static Certainty certainty(Branch plant, Certainty standard) {
         Branch row = plant.branch(LIMITS).flatMap(limits -> limits.branch(CERTAINTY)).orElse(Branch.EMPTY);
-        Certainty standard = Certainty.standard();
         Pointer place = Pointer.of(LIMITS, CERTAINTY);
         return below(place, () -> new Certainty(number(row, "overloaded").orElse(standard.overloaded()),
                 number(row, "undecided").orElse(standard.undecided()), number(row, "near").orElse(standard.near())));
     }
 
-    private static SealRates sealRates(Branch plant) {
-        SealRates rates = SealRates.standard();
+    private static SealRates sealRates(Branch plant, SealRates base) {
+        SealRates rates = base;
         List<Branch> rows = plant.branches("sealRates");
         for (int i = 0; i < rows.size(); i++) {
             Pointer place = Pointer.of("sealRates").child(i);
@@ -128,8 +130,8 @@ final class SiteSettings {
         return rates;
     }
 
-    private static Instruments instruments(Branch plant) {
-        Instruments instruments = Instruments.standard();
+    private static Instruments instruments(Branch plant, Instruments base) {
+        Instruments instruments = base;
         List<Branch> rows = plant.branches("instruments");
         for (int i = 0; i < rows.size(); i++) {
             Pointer place = Pointer.of("instruments").child(i);

@@ -10,6 +10,7 @@ import bedmark.engine.uncertainty.Uncertain;
 import bedmark.engine.verdict.AllowedDepth;
 import bedmark.engine.verdict.Component;
 import bedmark.engine.verdict.Limit;
+import bedmark.engine.verdict.Remedy;
 import bedmark.engine.verdict.Rule;
 import java.util.ArrayList;
 import java.util.EnumMap;
@@ -31,14 +32,14 @@ final class Appraisal {
         design = FeedFacts.atDesign(zone).value();
     }
 
-    /** What this zone adds to its conveyor's load today. */
-    ConveyorLoad.Part loadToday() {
-        return new ConveyorLoad.Part(tape, today.driveShare());
+    /** The zone at today's feed. */
+    FeedFacts today() {
+        return today;
     }
 
-    /** The same at design throughput, or today's where that is not known. */
-    ConveyorLoad.Part loadAtDesign() {
-        return new ConveyorLoad.Part(tape, design.orElse(today).driveShare());
+    /** The zone at design throughput, or at today's feed where that is not known. */
+    FeedFacts atDesign() {
+        return design.orElse(today);
     }
 
     Assessment judge(Optional<ConveyorLoad> loadToday, Optional<ConveyorLoad> loadAtDesign) {
@@ -56,13 +57,14 @@ final class Appraisal {
         loadToday.filter(sum -> sum.lacking() > 0 && findings.has(Rule.SKIRTS_OVER_BUDGET))
                 .ifPresent(sum -> assumptions.add(
                         Assumption.of("conveyor-sum-lower-bound", Integer.toString(sum.lacking()))));
+        List<Remedy> remedies = new Remedies(zone, findings.all(), othersShare(loadToday)).all();
         return new Assessment(today.materialDrag().value().map(drag -> today.method()),
-                estimates(Result.class, results), estimates(DragMethod.class, methods), energyKind(), profile,
-                findings.level(!required.isEmpty()), atDesign.map(then -> then.level(!required.isEmpty())),
-                findings.all(), atDesign.map(Findings::all).orElse(List.of()), allowedDepths(),
-                new Remedies(zone, findings.all(), othersShare(loadToday)).all(), assumptions, requirements.all(required, numbers), required,
-                zone.sidesWithoutSeals(), today.skirtPower().value().map(tape::shares).orElse(List.<Share>of()),
-                leading(), findings.repeat());
+                estimates(Result.class, results), estimates(DragMethod.class, methods), new Spread(today).of(methods),
+                energyKind(), profile, findings.level(!required.isEmpty()),
+                atDesign.map(then -> then.level(!required.isEmpty())), findings.all(),
+                atDesign.map(Findings::all).orElse(List.of()), allowedDepths(), remedies, assumptions,
+                requirements.all(required, numbers), required, zone.sidesWithoutSeals(),
+                today.skirtPower().value().map(tape::shares).orElse(List.<Share>of()), leading(), findings.repeat());
     }
 
     private double othersShare(Optional<ConveyorLoad> load) {

@@ -24,6 +24,7 @@ import java.util.Optional;
  * @param method            the method of the material drag, where one could be used
  * @param results           the numbers with their standard uncertainties
  * @param methods           the material drag by every method that could be computed (N)
+ * @param spread            how far those methods lie apart, and why; nothing where there is one
  * @param energyKind        whether the energy is the motor's electrical or the shaft's
  * @param profile           the depth at the board at each station
  * @param level             the verdict
@@ -41,7 +42,7 @@ import java.util.Optional;
  * @param repeat            the reading to take again first where the verdict is undecided
  */
 public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> results,
-        Map<DragMethod, Estimate> methods, Optional<EnergyKind> energyKind, List<DepthPoint> profile, Level level,
+        Map<DragMethod, Estimate> methods, Optional<MethodSpread> spread, Optional<EnergyKind> energyKind, List<DepthPoint> profile, Level level,
         Optional<Level> levelAtDesignFeed, List<Finding> findings, List<Finding> findingsAtDesign,
         List<AllowedDepth> allowedDepths, List<Remedy> remedies, List<Assumption> assumptions, List<String> missing,
         List<String> missingRequired, List<Side> sidesWithoutSeals, List<Share> powerShares,
@@ -85,11 +86,25 @@ public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> resu
         return Optional.ofNullable(results.get(result));
     }
 
+    /**
+     * A number with everything that makes it uncertain: what the readings bring, and what the disagreement of the drag
+     * methods brings where it counts.
+     */
+    public Optional<Estimate> counted(Result result) {
+        double drag = get(Result.SKIRT_DRAG).map(Estimate::value).orElse(0.0);
+        double methodsApart = spread.map(MethodSpread::standardUncertainty).orElse(0.0);
+        double share = result == Result.MATERIAL_DRAG || result == Result.SKIRT_DRAG ? 1
+                : get(result).filter(number -> result.followsDrag() && drag > 0)
+                        .map(number -> number.value() / drag).orElse(0.0);
+        return get(result).map(number -> new Estimate(number.value(),
+                Math.hypot(number.standardUncertainty(), share * methodsApart)));
+    }
+
     /** The same assessment with one more thing that was taken for granted before the engine saw the zone. */
     public Assessment with(Assumption assumption) {
         List<Assumption> more = new ArrayList<>(assumptions);
         more.add(assumption);
-        return new Assessment(method, results, methods, energyKind, profile, level, levelAtDesignFeed, findings,
+        return new Assessment(method, results, methods, spread, energyKind, profile, level, levelAtDesignFeed, findings,
                 findingsAtDesign, allowedDepths, remedies, more, missing, missingRequired, sidesWithoutSeals,
                 powerShares, leading, repeat);
     }

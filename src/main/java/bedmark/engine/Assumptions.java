@@ -48,9 +48,15 @@ final class Assumptions {
     private void geometry(Set<Assumption> all) {
         fromRegister(all, zone.spacing(), Datum.READ_SPACING, Datum.REGISTER_SPACING);
         fromRegister(all, zone.height(), Datum.READ_HEIGHT, Datum.REGISTER_HEIGHT);
-        absent(all, "incline-level", Datum.INCLINE, zone.accelerationLength());
+        if (zone.settings().conventions().incline()) {
+            absent(all, "incline-level", Datum.INCLINE, zone.accelerationLength());
+        } else if (zone.number(Datum.INCLINE).isKnown() && zone.accelerationLength().isKnown()) {
+            all.add(Assumption.of("incline-not-counted"));
+        }
         absent(all, "feed-velocity-zero", Datum.FEED_VELOCITY, today.loadingForce());
-        absent(all, "impact-length-zero", Datum.IMPACT_LENGTH, zone.settlingLength());
+        if (zone.settings().conventions().lengths().bySpeed()) {
+            absent(all, "impact-length-zero", Datum.IMPACT_LENGTH, zone.settlingLength());
+        }
         if (zone.designDepth().value().filter(depth -> depth.value() == 0).isPresent()) {
             all.add(Assumption.of("design-flow-carried-by-trough"));
         }

@@ -5,6 +5,7 @@ import bedmark.engine.uncertainty.Reading;
 import bedmark.engine.uncertainty.Sensitivity;
 import bedmark.engine.uncertainty.Tape;
 import bedmark.engine.uncertainty.Uncertain;
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -15,31 +16,46 @@ import java.util.Optional;
  * the register, such as the drive's efficiency or the factor of one material, errs in all of them alike; readings and
  * the transfers' own data are each zone's own.
  *
- * @param share   of the rated power
+ * @param share   of the rated power, with the standard uncertainty that the readings bring
+ * @param spread  standard uncertainty of the share that the disagreement of the drag methods brings; a method that errs
+ *                does so in all zones alike
  * @param lacking how many zones are not in it; with any, the share is a lower bound
  */
-record ConveyorLoad(Estimate share, int lacking) {
-
-    /** What one zone adds. */
-    record Part(Tape tape, Deduced<Uncertain> driveShare) {
-    }
+record ConveyorLoad(Estimate share, double spread, int lacking) {
 
     /** The sum over the zones whose share is known; nothing where none is. */
-    static Optional<ConveyorLoad> of(List<Part> zones, int unsurveyed) {
-        List<Part> known = zones.stream().filter(part -> part.driveShare().isKnown()).toList();
-        if (known.isEmpty()) {
-            return Optional.empty();
+    static Optional<ConveyorLoad> of(List<FeedFacts> zones, int unsurveyed) {
+        List<Known> known = new ArrayList<>(zones.size());
+        double spread = 0;
+        for (FeedFacts zone : zones) {
+            Deduced<Uncertain> share = zone.driveShare();
+            if (share.isKnown()) {
+                known.add(new Known(zone.zone().sources().tape(), share.get()));
+                spread += zone.spreadOfShare();
+            }
         }
-        int lacking = unsurveyed + zones.size() - known.size();
-        if (known.size() == 1) {
-            return Optional.of(new ConveyorLoad(known.get(0).tape().estimate(known.get(0).driveShare().get()), lacking));
+        return known.isEmpty() ? Optional.empty() : Optional.of(new ConveyorLoad(sum(known), spread,
+                unsurveyed + zones.size() - known.size()));
+    }
+
+    /** The share with everything that makes it uncertain. */
+    Estimate counted() {
+        return new Estimate(share.value(), Math.hypot(share.standardUncertainty(), spread));
+    }
+
+    private record Known(Tape tape, Uncertain share) {
+    }
+
+    private static Estimate sum(List<Known> zones) {
+        if (zones.size() == 1) {
+            return zones.get(0).tape().estimate(zones.get(0).share());
         }
         double sum = 0;
         double variance = 0;
         Map<Reading, Double> common = new HashMap<>();
-        for (Part part : known) {
-            sum += part.driveShare().get().value();
-            for (Sensitivity sensitivity : part.tape().sensitivities(part.driveShare().get())) {
+        for (Known zone : zones) {
+            sum += zone.share().value();
+            for (Sensitivity sensitivity : zone.tape().sensitivities(zone.share())) {
                 if (isOwn(sensitivity.reading())) {
                     variance += sensitivity.variance();
                 } else {
@@ -50,10 +66,11 @@ record ConveyorLoad(Estimate share, int lacking) {
         for (Map.Entry<Reading, Double> entry : common.entrySet()) {
             variance += new Sensitivity(entry.getKey(), entry.getValue()).variance();
         }
-        return Optional.of(new ConveyorLoad(new Estimate(sum, Math.sqrt(variance)), lacking));
+        return new Estimate(sum, Math.sqrt(variance));
     }
 
-    private static boolean isOwn(Reading reading) {
+    /** Whether a reading is one zone's own, rather than one that all zones take from the same row of the register. */
+    static boolean isOwn(Reading reading) {
         return reading.name().startsWith("/readings/") || reading.name().startsWith("/transfer/");
     }
 }

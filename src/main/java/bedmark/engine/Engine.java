@@ -32,16 +32,16 @@ public final class Engine {
     public static List<Assessment> assessConveyor(List<LoadingZone> zones, int unsurveyed, Settings settings) {
         zones.forEach(Engine::check);
         List<Appraisal> appraisals = new ArrayList<>(zones.size());
-        List<ConveyorLoad.Part> partsToday = new ArrayList<>(zones.size());
-        List<ConveyorLoad.Part> partsAtDesign = new ArrayList<>(zones.size());
+        List<FeedFacts> feedsToday = new ArrayList<>(zones.size());
+        List<FeedFacts> feedsAtDesign = new ArrayList<>(zones.size());
         for (LoadingZone zone : zones) {
             Appraisal appraisal = new Appraisal(zone, settings);
             appraisals.add(appraisal);
-            partsToday.add(appraisal.loadToday());
-            partsAtDesign.add(appraisal.loadAtDesign());
+            feedsToday.add(appraisal.today());
+            feedsAtDesign.add(appraisal.atDesign());
         }
-        Optional<ConveyorLoad> today = ConveyorLoad.of(partsToday, unsurveyed);
-        Optional<ConveyorLoad> atDesign = ConveyorLoad.of(partsAtDesign, unsurveyed);
+        Optional<ConveyorLoad> today = ConveyorLoad.of(feedsToday, unsurveyed);
+        Optional<ConveyorLoad> atDesign = ConveyorLoad.of(feedsAtDesign, unsurveyed);
         List<Assessment> assessments = new ArrayList<>(zones.size());
         for (Appraisal appraisal : appraisals) {
             assessments.add(appraisal.judge(today, atDesign));

@@ -69,7 +69,11 @@ final class Explanation {
         sheet.input("μ2", Deduced.known(zone.sources().boardGrip()), "1", zone.settings().boardGrip().name());
         assumed("v0", Datum.FEED_VELOCITY, 0, "m/s");
         assumed("Li", Datum.IMPACT_LENGTH, 0, "m");
-        assumed("δ", Datum.INCLINE, 0, "rad");
+        if (zone.settings().conventions().incline()) {
+            assumed("δ", Datum.INCLINE, 0, "rad");
+        } else {
+            sheet.constant("δ", 0, "rad");
+        }
         assumed("μw", Datum.WALL_FRICTION, 1, "1");
     }
 
@@ -250,8 +254,8 @@ final class Explanation {
             if (!zone.accelerationLength().isKnown()) {
                 sheet.constant("lb", 0, "m");
             }
-            sheet.step(zone.zone().is(LoadingZone.Mark.HIGH_AIR_FLOW) ? SettlingLength.FORMULA_HIGH_AIR
-                    : SettlingLength.FORMULA, settling.get(), "m");
+            sheet.step(SettlingLength.formula(zone.settings().conventions().lengths(),
+                    zone.zone().is(LoadingZone.Mark.HIGH_AIR_FLOW)), settling.get(), "m");
         }
         Optional<Uncertain> belt = zone.number(Datum.BELT_WIDTH).value();
         if (belt.isPresent() && zone.spacing().isKnown()) {

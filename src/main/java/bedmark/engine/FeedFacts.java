@@ -90,6 +90,10 @@ final class FeedFacts {
         return statedFlow;
     }
 
+    Deduced<Uncertain> integralOfSquare() {
+        return integralOfSquare;
+    }
+
     Deduced<Uncertain> meanSquare() {
         return Deduced.from(integralOfSquare, zone.length(), Uncertain::over);
     }
@@ -158,6 +162,12 @@ final class FeedFacts {
 
     Deduced<Uncertain> driveShare() {
         return Deduced.from(drivePower, zone.number(Datum.RATED_POWER), Uncertain::over);
+    }
+
+    /** What the disagreement of the drag methods brings into the drive's share. */
+    double spreadOfShare() {
+        return driveShare().isKnown() && skirtDrag.get().value() > 0
+                ? Spread.standardUncertainty(this) * driveShare().get().value() / skirtDrag.get().value() : 0;
     }
 
     /** Energy of the skirts in a year (Wh): electrical where the motor's efficiency is known, else the shaft's. */

@@ -1,5 +1,6 @@
 package bedmark.engine;
 
+import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.uncertainty.Tape;
 import bedmark.engine.uncertainty.Traced;
 import bedmark.engine.uncertainty.Uncertain;
@@ -71,17 +72,23 @@ final class Findings {
             load.ifPresent(sum -> judge(sum, observed, limit));
         } else if (observed.isKnown()) {
             Traced traced = tape.traced(observed.get(), OF_THIS_WALK);
-            judged.put(rule, Judgement.of(rule, traced.estimate(), limit, settings.certainty(), traced.leading()));
+            judged.put(rule, Judgement.of(rule, widened(traced.estimate(), observations.spread(rule)), limit,
+                    settings.certainty(), traced.leading()));
         }
     }
 
     /** A sum that lacks zones can only show that the limit is passed, never that it is kept. */
     private void judge(ConveyorLoad load, Deduced<Uncertain> ownPart, Limit limit) {
         Optional<String> leading = ownPart.value().flatMap(part -> tape.traced(part, OF_THIS_WALK).leading());
-        Finding finding = Judgement.of(Rule.SKIRTS_OVER_BUDGET, load.share(), limit, settings.certainty(), leading);
+        Finding finding = Judgement.of(Rule.SKIRTS_OVER_BUDGET, load.counted(), limit, settings.certainty(), leading);
         if (load.lacking() == 0 || finding.level() != Level.WITHIN) {
             judged.put(Rule.SKIRTS_OVER_BUDGET, finding);
         }
+    }
+
+    private static Estimate widened(Estimate estimate, double spread) {
+        return spread == 0 ? estimate
+                : new Estimate(estimate.value(), Math.hypot(estimate.standardUncertainty(), spread));
     }
 
     /** Every rule that could be evaluated, once, in their order. */

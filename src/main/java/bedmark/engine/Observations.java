@@ -57,6 +57,12 @@ final class Observations {
         };
     }
 
+    /** What the disagreement of the drag methods brings into the observed number of a rule on this zone alone. */
+    double spread(Rule rule) {
+        return rule == Rule.DRIVE_NEAR_RATING && feed != today
+                ? Math.abs(feed.spreadOfShare() - today.spreadOfShare()) : 0;
+    }
+
     /** The limits of a rule in the unit of what it observes. */
     Limit limit(Rule rule) {
         Limit limit = zone.settings().limits().of(rule);

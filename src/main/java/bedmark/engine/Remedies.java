@@ -139,9 +139,12 @@ final class Remedies {
 
     /** The zone is cut to the length that it needs to settle. */
     private Optional<Remedy> shorterZone() {
+        if (!zone.settlingLength().isKnown()) {
+            return Optional.empty();
+        }
         double length = zone.length().get().value();
         double needed = zone.settlingLength().get().value() * near(Rule.ZONE_TOO_SHORT);
-        if (needed == 0 || needed >= length * (1 - WORTH_WHILE)) {
+        if (needed <= 0 || needed >= length * (1 - WORTH_WHILE)) {
             return Optional.empty();
         }
         ZoneFacts shorter = zone.withLength(needed);

@@ -59,6 +59,14 @@ public enum Result {
         return Stream.of(values()).filter(result -> result.key.equals(key)).findFirst();
     }
 
+    /** Whether it is a multiple of the skirt drag, and uncertain with it. */
+    public boolean followsDrag() {
+        return switch (this) {
+            case SKIRT_DRAG, SKIRT_POWER, DRIVE_POWER, DRIVE_SHARE, RUNNING_SHARE, ENERGY -> true;
+            default -> false;
+        };
+    }
+
     public String key() {
         return key;
     }

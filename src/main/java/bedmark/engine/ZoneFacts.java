@@ -6,6 +6,7 @@ import bedmark.engine.bed.Station;
 import bedmark.engine.drag.DragMethod;
 import bedmark.engine.flow.AccelerationLength;
 import bedmark.engine.flow.BeltSpeed;
+import bedmark.engine.flow.LengthConventions;
 import bedmark.engine.flow.OpenBelt;
 import bedmark.engine.flow.SettlingLength;
 import bedmark.engine.seal.SealDrag;
@@ -304,12 +305,16 @@ final class ZoneFacts {
     }
 
     private Deduced<Uncertain> findAccelerationLength() {
-        return Deduced.flat(Deduced.from(beltSpeed, speed -> AccelerationLength.of(speed, feedVelocity(),
-                sources.beltGrip(), sources.numberOr(Datum.INCLINE, 0))));
+        Uncertain incline = settings().conventions().incline() ? sources.numberOr(Datum.INCLINE, 0) : Uncertain.ZERO;
+        return Deduced.flat(Deduced.from(beltSpeed,
+                speed -> AccelerationLength.of(speed, feedVelocity(), sources.beltGrip(), incline)));
     }
 
+    /** Nothing where the site goes by no convention for it. */
     private Deduced<Uncertain> findSettlingLength() {
-        return Deduced.from(beltSpeed, speed -> SettlingLength.of(sources.numberOr(Datum.IMPACT_LENGTH, 0), speed,
+        LengthConventions lengths = settings().conventions().lengths();
+        return lengths.none() ? Deduced.nothing() : Deduced.from(beltSpeed, speed -> SettlingLength.of(lengths,
+                sources.numberOr(Datum.IMPACT_LENGTH, 0), speed,
                 accelerationLength.isKnown() ? accelerationLength.get() : Uncertain.ZERO,
                 zone().is(LoadingZone.Mark.HIGH_AIR_FLOW)));
     }

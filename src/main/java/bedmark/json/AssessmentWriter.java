@@ -4,6 +4,7 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.engine.Assessment;
 import bedmark.engine.Assumption;
+import bedmark.engine.MethodSpread;
 import bedmark.engine.Result;
 import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.uncertainty.Share;
@@ -67,7 +68,12 @@ public final class AssessmentWriter {
                         .with("method", method.getKey().code())
                         .with("materialDragN", number(method.getValue().value()))
                         .with("standardUncertaintyN", number(method.getValue().standardUncertainty()))))
-                .with("uncertainty", uncertainty)
+                .with("uncertainty", uncertainty);
+        if (assessment.spread().isPresent()) {
+            branch = branch.with("methodSpread", spread(assessment.spread().get()))
+                    .with("uncertaintyWithSpread", counted(assessment));
+        }
+        branch = branch
                 .with("powerShares", series(assessment.powerShares(), AssessmentWriter::share))
                 .with("bedProfile", series(assessment.profile(), point -> Branch.EMPTY
                         .with("positionM", number(point.position()))
@@ -83,6 +89,26 @@ public final class AssessmentWriter {
                 .with("assumptions", series(assessment.assumptions(), AssessmentWriter::assumption))
                 .with("missing", texts(assessment.missing()));
         return assessment.repeat().isPresent() ? branch.with("repeat", assessment.repeat().get()) : branch;
+    }
+
+    private static Branch spread(MethodSpread spread) {
+        return Branch.EMPTY.with("lowest", spread.lowest().code()).with("highest", spread.highest().code())
+                .with("ratio", number(spread.ratio()))
+                .with("reasons", series(spread.reasons(), reason -> Branch.EMPTY
+                        .with("code", reason.cause().code()).with("ratio", number(reason.ratio()))))
+                .with("standardUncertaintyN", number(spread.standardUncertainty()));
+    }
+
+    /** Standard uncertainties of what the drag methods disagree about, the disagreement among what makes them up. */
+    private static Branch counted(Assessment assessment) {
+        Branch counted = Branch.EMPTY;
+        for (Result result : assessment.results().keySet()) {
+            if (result == Result.MATERIAL_DRAG || result.followsDrag()) {
+                counted = counted.with(result.key(),
+                        number(assessment.counted(result).orElseThrow().standardUncertainty()));
+            }
+        }
+        return counted;
     }
 
     private static Branch share(Share share) {

@@ -1,6 +1,7 @@
 package bedmark.json;
 
 import bedmark.document.Branch;
+import bedmark.engine.Conventions;
 import bedmark.engine.Settings;
 import bedmark.engine.flow.MaximumBeltSpeed;
 import bedmark.engine.flow.SpeedClass;
@@ -37,10 +38,11 @@ final class ReferenceSettings {
 
     Settings settings() {
         Settings standard = Settings.standard();
+        Conventions known = standard.conventions();
         Branch limits = files.get(ReferenceFile.LIMITS);
         return standard.with(limits(limits)).with(certainty(limits))
-                .withGrip(grip(limits, "beltGrip", standard.beltGrip()),
-                        grip(limits, "boardGrip", standard.boardGrip()))
+                .with(known.withGrip(grip(limits, "beltGrip", known.beltGrip()),
+                        grip(limits, "boardGrip", known.boardGrip())))
                 .with(sealRates(files.get(ReferenceFile.SEAL_RATES)))
                 .with(instruments(files.get(ReferenceFile.INSTRUMENTS)))
                 .with(speeds(files.get(ReferenceFile.SPEED_CLASSES)));

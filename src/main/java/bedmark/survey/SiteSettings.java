@@ -6,8 +6,11 @@ import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
+import bedmark.engine.Conventions;
+import bedmark.engine.Prices;
 import bedmark.engine.Settings;
 import bedmark.engine.drag.DragMethod;
+import bedmark.engine.flow.LengthConventions;
 import bedmark.engine.seal.SealCondition;
 import bedmark.engine.seal.SealRates;
 import bedmark.engine.seal.SealType;
@@ -47,9 +50,9 @@ final class SiteSettings {
      */
     static Settings of(Branch plant, Settings base) {
         return sound(() -> {
-            Settings settings = grips(plant, base.with(limits(plant, base.limits()))
-                    .with(certainty(plant, base.certainty())).with(sealRates(plant, base.sealRates()))
-                    .with(instruments(plant, base.instruments())));
+            Settings settings = base.with(limits(plant, base.limits())).with(certainty(plant, base.certainty()))
+                    .with(sealRates(plant, base.sealRates())).with(instruments(plant, base.instruments()))
+                    .with(conventions(plant, base.conventions())).with(prices(plant));
             return plant.text("method").map(code -> settings.with(
                     word(DragMethod::ofCode, code, Pointer.of("method")))).orElse(settings);
         });
@@ -92,14 +95,42 @@ final class SiteSettings {
         return limits;
     }
 
-    /** The two friction factors of ISO 5048; one that the site set is taken as it stands. */
-    private static Settings grips(Branch plant, Settings settings) {
+    /** How the site computes; a friction factor of ISO 5048 that it set is taken as it stands. */
+    private static Conventions conventions(Branch plant, Conventions standard) {
         Branch rows = plant.branch(LIMITS).orElse(Branch.EMPTY);
-        Optional<Double> onBelt = below(Pointer.of(LIMITS), () -> number(rows, "beltGrip"));
-        Optional<Double> onBoards = below(Pointer.of(LIMITS), () -> number(rows, "boardGrip"));
-        return onBelt.isEmpty() && onBoards.isEmpty() ? settings
-                : settings.withGrip(onBelt.orElse(settings.beltGrip().value()),
-                        onBoards.orElse(settings.boardGrip().value()));
+        return below(Pointer.of(LIMITS), () -> {
+            Optional<Double> onBelt = number(rows, "beltGrip");
+            Optional<Double> onBoards = number(rows, "boardGrip");
+            Conventions chosen = onBelt.isEmpty() && onBoards.isEmpty() ? standard
+                    : standard.withGrip(onBelt.orElse(standard.beltGrip().value()),
+                            onBoards.orElse(standard.boardGrip().value()));
+            return chosen.with(new LengthConventions(flag(rows, "lengthBySpeed"), flag(rows, "lengthByAcceleration"),
+                            flag(rows, "lengthLeast")))
+                    .withIncline(flag(rows, "inclineInAcceleration")).withSpread(flag(rows, "methodSpread"))
+                    .withTrials(trials(rows, standard.trials()));
+        });
+    }
+
+    private static int trials(Branch rows, int standard) {
+        return rows.number("monteCarloTrials").map(number -> {
+            try {
+                return number.intValueExact();
+            } catch (ArithmeticException e) {
+                throw new Refused(Defect.at(Pointer.of("monteCarloTrials"), "trials-impossible",
+                        number.toPlainString(), Integer.toString(Conventions.MOST_TRIALS)), e);
+            }
+        }).orElse(standard);
+    }
+
+    private static Prices prices(Branch plant) {
+        Optional<Branch> tariff = plant.branch("tariff");
+        OptionalDouble energy = tariff.isEmpty() ? OptionalDouble.empty()
+                : below(Pointer.of("tariff"), () -> number(tariff.get(), "energy", OptionalDouble.empty()));
+        return new Prices(energy, number(plant, "co2Factor", OptionalDouble.empty()));
+    }
+
+    private static boolean flag(Branch rows, String key) {
+        return rows.flag(key).orElse(true);
     }
 
     private static Certainty certainty(Branch plant, Certainty standard) {

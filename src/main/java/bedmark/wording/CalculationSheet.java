@@ -6,6 +6,7 @@ import bedmark.document.Pointer;
 import bedmark.engine.Assessment;
 import bedmark.engine.Assumption;
 import bedmark.engine.Result;
+import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Rule;
 import bedmark.engine.working.Step;
@@ -70,7 +71,7 @@ public final class CalculationSheet {
                 .filter(input -> input.symbol().reading().isPresent() && !isReading(input.symbol()))
                 .map(this::given).toList());
         lines.heading(wording.text("working.steps"));
-        steps(working, lines);
+        steps(working, assessment, lines);
         lines.heading(wording.text("working.findings"));
         findings(assessment, working, lines);
         if (!assessment.assumptions().isEmpty()) {
@@ -161,7 +162,7 @@ public final class CalculationSheet {
         return value(input) + " " + bare(Pointer.parse(input.symbol().reading().orElseThrow()));
     }
 
-    private void steps(Working working, SheetLines lines) {
+    private void steps(Working working, Assessment assessment, SheetLines lines) {
         Set<String> rules = new HashSet<>();
         Stream.of(Rule.values()).forEach(rule -> rules.add(rule.code()));
         List<Step> steps = working.steps().stream().filter(step -> !rules.contains(step.result())).toList();
@@ -171,9 +172,9 @@ public final class CalculationSheet {
                 next++;
             }
             if (next - i == 1) {
-                lines.row(NAMES, name(steps.get(i)), line(steps.get(i)));
+                lines.row(NAMES, name(steps.get(i)), line(steps.get(i), assessment));
             } else {
-                together(steps.subList(i, next), lines);
+                together(steps.subList(i, next), assessment, lines);
             }
             i = next;
         }
@@ -194,28 +195,30 @@ public final class CalculationSheet {
         return wording.text("working.formula." + step.formula().code()) + " [" + step.formula().source() + "]";
     }
 
-    private String line(Step step) {
+    private String line(Step step, Assessment assessment) {
         String formula = numbers.formula(step.formula());
         boolean general = step.formula().code().equals(NO_NUMBERS);
         String put = general ? "" : numbers.substituted(step);
-        return step.formula().sign() + " = " + formula + (general ? "" : " = " + put) + result(step, put);
+        return step.formula().sign() + " = " + formula + (general ? "" : " = " + put) + result(step, put, assessment);
     }
 
     /** The result, unless what was put in is that number already. */
-    private String result(Step step, String put) {
+    private String result(Step step, String put, Assessment assessment) {
         boolean intermediate = Result.ofKey(step.result()).isEmpty() && !step.result().startsWith("methods.");
+        double spread = Result.ofKey(step.result()).flatMap(assessment::counted)
+                .map(Estimate::standardUncertainty).orElse(step.standardUncertainty().orElse(0));
         String value = intermediate ? numbers.si(step.value(), step.unit())
-                : numbers.both(step.value(), step.standardUncertainty().orElse(0), step.unit());
+                : numbers.both(step.value(), spread, step.unit());
         return put.equals(numbers.number(step.value())) ? value.substring(put.length()) : " = " + value;
     }
 
-    private void together(List<Step> steps, SheetLines lines) {
+    private void together(List<Step> steps, Assessment assessment, SheetLines lines) {
         String text = general(steps.get(0));
         String sign = steps.get(0).formula().sign().replaceAll("\\d+$", "");
         List<String> parts = new ArrayList<>();
         parts.add(sign + " = " + text.substring(sign.length()).replace(" · ", "·").replace(" − ", "−"));
         steps.forEach(step -> parts.add(step.formula().sign() + " = " + numbers.substituted(step)
-                + result(step, numbers.substituted(step))));
+                + result(step, numbers.substituted(step), assessment)));
         lines.row(NAMES, name(steps.get(0)), String.join("; ", parts));
     }
 

@@ -7,6 +7,7 @@ import bedmark.engine.drag.TabulatedFactor;
 import bedmark.engine.flow.AccelerationLength;
 import bedmark.engine.flow.BeltSpeed;
 import bedmark.engine.flow.BoardPlacement;
+import bedmark.engine.flow.LengthConventions;
 import bedmark.engine.flow.LoadingForce;
 import bedmark.engine.flow.MaximumBeltSpeed;
 import bedmark.engine.flow.OpenBelt;
@@ -56,9 +57,9 @@ final class GoldenFormulas {
             formula("least-edge", a -> BoardPlacement.leastEdge(a.get("beltWidth"))),
             formula("widest-spacing", a -> BoardPlacement.widestSpacing(a.get("beltWidth"), false)),
             formula("widest-spacing-free-flowing", a -> BoardPlacement.widestSpacing(a.get("beltWidth"), true)),
-            formula("settling-length", a -> SettlingLength.of(a.get("impactLength"), a.get("beltSpeed"),
+            formula("settling-length", a -> SettlingLength.of(LengthConventions.ALL, a.get("impactLength"), a.get("beltSpeed"),
                     a.get("accelerationLength"), false)),
-            formula("settling-length-high-air-flow", a -> SettlingLength.of(a.get("impactLength"),
+            formula("settling-length-high-air-flow", a -> SettlingLength.of(LengthConventions.ALL, a.get("impactLength"),
                     a.get("beltSpeed"), a.get("accelerationLength"), true)),
             formula("seal-drag", a -> SealDrag.of(a.get("rate"), 1, a.get("length"))),
             Map.entry("maximum-speed-grain", a -> MaximumBeltSpeed.of(SpeedClass.GRAIN_FREE_FLOWING,

@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.bed.DepthMethod;
 import bedmark.engine.drag.DragMethod;
+import bedmark.engine.flow.LengthConventions;
 import bedmark.engine.seal.SealCondition;
 import bedmark.engine.seal.SealType;
 import bedmark.engine.uncertainty.Estimate;
@@ -40,6 +41,10 @@ class WorkingTest {
             if (random.nextInt(3) == 0) {
                 settings = settings.with(DragMethod.values()[random.nextInt(DragMethod.values().length)])
                         .with(settings.sealRates().with(SealType.OBLIQUE, SealCondition.WORN, 1.5));
+            }
+            if (random.nextInt(3) == 0) {
+                settings = settings.with(settings.conventions().with(new LengthConventions(random.nextBoolean(),
+                        random.nextBoolean(), random.nextBoolean())).withIncline(random.nextBoolean()));
             }
             if (random.nextInt(4) == 0) {
                 zone = zone.with(Datum.SITE_FACTOR, 0.05 + random.nextDouble(), 0.01);

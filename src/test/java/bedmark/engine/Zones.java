@@ -118,13 +118,13 @@ final class Zones {
                         segment.condition(), exact(segment.length()))).toList());
     }
 
-    /** The standard settings with exact instruments and factors. */
+    /** The standard settings with exact instruments and factors, methods taken to agree. */
     static Settings exactSettings() {
         Instruments exact = INSTRUMENTS;
         for (Instrument instrument : Instrument.values()) {
             exact = exact.with(instrument, 0);
         }
-        return Settings.standard().with(exact).withGrip(0.6, 0.6);
+        return Settings.standard().with(exact).with(Conventions.standard().withGrip(0.6, 0.6).withSpread(false));
     }
 
     private static Reading exact(Reading reading) {

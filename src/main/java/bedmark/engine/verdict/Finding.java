@@ -8,7 +8,7 @@ import java.util.OptionalDouble;
  *
  * @param level                 within, near, undecided or overloaded
  * @param observed              in the unit of the rule
- * @param standardUncertainty   of the observed, in the same unit
+ * @param standardUncertainty   of the observed, in the same unit, with what the disagreement of the drag methods brings
  * @param near                  limit of warning, in the same unit
  * @param overloaded            limit of overload, in the same unit
  * @param probabilityNear       that the true value lies beyond {@code near}

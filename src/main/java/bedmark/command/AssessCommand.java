@@ -7,16 +7,19 @@ import bedmark.document.Pointer;
 import bedmark.engine.verdict.Level;
 import bedmark.json.AssessmentWriter;
 import bedmark.json.JsonWriter;
+import bedmark.json.ReferenceData;
 import bedmark.quantity.UnitSystem;
-import bedmark.survey.Assessor;
 import bedmark.survey.Assessor.Assessed;
+import bedmark.survey.Assessor;
 import bedmark.survey.Bundle;
+import bedmark.survey.Register;
 import bedmark.survey.Survey;
 import bedmark.wording.Wording;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.UUID;
 import java.util.concurrent.Callable;
@@ -49,6 +52,10 @@ final class AssessCommand implements Callable<Integer> {
             description = "Units of the text and the CSV (default: ${DEFAULT-VALUE}); JSON is always SI.")
     private String units;
 
+    @Option(names = "--reference", paramLabel = "DIR",
+            description = "Reference files of a site in the place of the shipped ones; what a plant decides wins.")
+    private Path reference;
+
     /** One way of printing. */
     static final class Output {
         @Option(names = "--json", description = "Print JSON.")
@@ -56,19 +63,18 @@ final class AssessCommand implements Callable<Integer> {
 
         @Option(names = "--csv", description = "Print CSV (RFC 4180).")
         private boolean csv;
+
+        @Option(names = "--explain", description = "Print the working of each survey as a calculation sheet.")
+        private boolean explain;
     }
 
     /**
      * The surveys of one bundle with their assessments.
      *
+     * @param assessor   who made them
      * @param superseded the surveys that a later revision in the bundle replaces; they are judged all the same
      */
-    record Judged(Bundle bundle, List<Assessed> surveys, Set<UUID> superseded) {
-
-        static Judged of(Bundle bundle) {
-            Assessor assessor = below(Pointer.of("plant"), () -> new Assessor(bundle.register()));
-            return new Judged(bundle, assessor.assess(bundle.surveys()), Survey.superseded(bundle.surveys()));
-        }
+    record Judged(Bundle bundle, Assessor assessor, List<Assessed> surveys, Set<UUID> superseded) {
     }
 
     AssessCommand(Surroundings surroundings) {
@@ -88,9 +94,10 @@ final class AssessCommand implements Callable<Integer> {
     }
 
     private int assess(Path from, UnitSystem system) throws Exception {
+        Optional<ReferenceData> data = Optional.ofNullable(reference).map(ReferenceData::read);
         List<Judged> judged = new ArrayList<>();
         for (BundleSource.Named named : BundleSource.read(from)) {
-            judged.add(in(named.file(), () -> named.judge(Judged::of)));
+            judged.add(in(named.file(), () -> named.judge(bundle -> judge(bundle, data))));
         }
         List<Assessed> all = judged.stream().flatMap(one -> one.surveys().stream()).toList();
         Wording wording = new Wording(surroundings.words(), system);
@@ -100,11 +107,23 @@ final class AssessCommand implements Callable<Integer> {
             surroundings.out().print(new String(json, StandardCharsets.UTF_8));
         } else if (output.csv) {
             new AssessmentTable(wording).print(judged, notice, surroundings.out());
+        } else if (output.explain) {
+            ExplainedText text = new ExplainedText(wording, notice);
+            judged.forEach(one -> text.print(one.bundle().register(), one.assessor(), one.surveys(),
+                    one.bundle().forms(), surroundings.out()));
         } else {
             new AssessmentText(wording).print(judged, notice, surroundings.out());
         }
         surroundings.out().flush();
         return exitCode(all);
+    }
+
+    /** Judges by the register; what a site keeps in files of its own takes the place of what is built in. */
+    private static Judged judge(Bundle bundle, Optional<ReferenceData> data) {
+        Assessor assessor = below(Pointer.of("plant"), () -> data
+                .map(own -> new Assessor(new Register(own.filled(bundle.register().document())), own.settings()))
+                .orElseGet(() -> new Assessor(bundle.register())));
+        return new Judged(bundle, assessor, assessor.assess(bundle.surveys()), Survey.superseded(bundle.surveys()));
     }
 
     private static int exitCode(List<Assessed> all) {

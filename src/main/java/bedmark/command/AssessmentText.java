@@ -72,7 +72,7 @@ final class AssessmentText {
     }
 
     /** The form that the survey was made with; without a whole one the readings go by their keys. */
-    private static FieldForm form(Survey survey, List<Branch> forms) {
+    static FieldForm form(Survey survey, List<Branch> forms) {
         Optional<String> id = survey.document().branch("form").flatMap(form -> form.text("id"));
         return forms.stream().filter(form -> id.isPresent() && form.text("id").equals(id)).findFirst()
                 .flatMap(AssessmentText::whole)

@@ -27,6 +27,12 @@ abstract class Group implements Callable<Integer> {
     static final class FormsGroup extends Group {
     }
 
+    /** Reference data. */
+    @Command(name = "reference", mixinStandardHelpOptions = true,
+            description = "Checks and writes reference data: materials, limits, seal rates, belt speeds, instruments.")
+    static final class ReferenceGroup extends Group {
+    }
+
     /** Stores. */
     @Command(name = "store", mixinStandardHelpOptions = true, description = "Proves and rebuilds a store.")
     static final class StoreGroup extends Group {

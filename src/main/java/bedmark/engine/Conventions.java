@@ -43,8 +43,12 @@ public record Conventions(Reading beltGrip, Reading boardGrip, LengthConventions
 
     /** The same with exact factors of ISO 5048. */
     public Conventions withGrip(double onBelt, double onBoards) {
-        return new Conventions(Reading.exact(beltGrip.name(), onBelt), Reading.exact(boardGrip.name(), onBoards),
-                lengths, incline, spread, trials);
+        return withGrip(Reading.exact(beltGrip.name(), onBelt), Reading.exact(boardGrip.name(), onBoards));
+    }
+
+    /** The same with other factors of ISO 5048 and their uncertainties. */
+    public Conventions withGrip(Reading onBelt, Reading onBoards) {
+        return new Conventions(onBelt, onBoards, lengths, incline, spread, trials);
     }
 
     public Conventions with(LengthConventions other) {

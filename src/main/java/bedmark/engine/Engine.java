@@ -3,6 +3,7 @@ package bedmark.engine;
 import bedmark.engine.uncertainty.ImpossibleReading;
 import java.util.ArrayList;
 import java.util.Collections;
+import bedmark.engine.working.Working;
 import java.util.List;
 import java.util.Optional;
 
@@ -46,6 +47,16 @@ public final class Engine {
             assessments.add(appraisal.judge(today, atDesign));
         }
         return Collections.unmodifiableList(assessments);
+    }
+
+    /**
+     * Shows how the numbers of a zone come about, as {@link #assess} computes them.
+     *
+     * @throws ImpossibleReading where a reading cannot be
+     */
+    public static Working explain(LoadingZone zone, Settings settings) {
+        check(zone);
+        return new Explanation(zone, settings).working();
     }
 
     /**

@@ -2,7 +2,6 @@ package bedmark.engine;
 
 import bedmark.engine.bed.Section;
 import bedmark.engine.flow.BoardPlacement;
-import bedmark.engine.flow.MaximumBeltSpeed;
 import bedmark.engine.flow.SpeedClass;
 import bedmark.engine.seal.SealSegment;
 import bedmark.engine.uncertainty.Uncertain;
@@ -134,7 +133,8 @@ final class Observations {
     private Deduced<Double> tableSpeed() {
         Optional<SpeedClass> material = zone.zone().speedClass();
         return material.isEmpty() ? Deduced.waitingFor("/material/speedClass") : Deduced.from(
-                zone.number(Datum.BELT_WIDTH), belt -> MaximumBeltSpeed.of(material.get(), belt.value()));
+                zone.number(Datum.BELT_WIDTH), belt -> zone.settings().maximumSpeeds()
+                        .forBelt(material.get(), belt.value()));
     }
 
     /** Change over the last quarter over the mean depth; nothing from one station, or where the bed touches nowhere. */

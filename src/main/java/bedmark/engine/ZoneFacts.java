@@ -280,7 +280,7 @@ final class ZoneFacts {
     }
 
     /** The rate that the site fitted where its own method decides, else that of its table. */
-    private Uncertain sealRate() {
+    Uncertain sealRate() {
         Deduced<Uncertain> fitted = number(Datum.SITE_SEAL_RATE);
         return method() == DragMethod.SITE && fitted.isKnown() ? fitted.get() : sources.sealRate();
     }
@@ -319,9 +319,14 @@ final class ZoneFacts {
                 zone().is(LoadingZone.Mark.HIGH_AIR_FLOW)));
     }
 
+    /** Between the boards as they are registered. */
+    Deduced<Section> registeredSection() {
+        return section(number(Datum.REGISTER_SPACING));
+    }
+
     /** Depth at design throughput, design speed and registered geometry; 0 where trough and crown carry it. */
     private Deduced<Uncertain> findDesignDepth() {
-        return Deduced.from(section(number(Datum.REGISTER_SPACING)), number(Datum.DESIGN_THROUGHPUT),
+        return Deduced.from(registeredSection(), number(Datum.DESIGN_THROUGHPUT),
                 number(Datum.BULK_DENSITY), number(Datum.DESIGN_SPEED), (registered, flow, density, speed) ->
                         registered.level(flow.over(density).over(speed)).max(Uncertain.ZERO));
     }

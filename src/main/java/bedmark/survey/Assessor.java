@@ -37,8 +37,17 @@ public final class Assessor {
      * @throws Refused where the site's own settings cannot be; the place is a pointer within the plant
      */
     public Assessor(Register register) {
+        this(register, Settings.standard());
+    }
+
+    /**
+     * The same with a site's own reference in the place of the defaults; what the plant itself decides wins.
+     *
+     * @throws Refused where the site's own settings cannot be; the place is a pointer within the plant
+     */
+    public Assessor(Register register, Settings reference) {
         this.register = register;
-        this.settings = SiteSettings.of(register.document());
+        this.settings = SiteSettings.of(register.document(), reference);
         this.factors = SiteSettings.sound(() -> SiteFactors.of(register, settings.instruments()));
     }
 

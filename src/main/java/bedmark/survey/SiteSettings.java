@@ -32,7 +32,7 @@ import java.util.function.Supplier;
 
 /**
  * What a site decided, read from its register: {@code limits}, {@code sealRates}, {@code instruments} and
- * {@code method} of the plant. What it leaves out keeps the default of the engineering page; a limit of a rule that
+ * {@code method} of the plant. What it leaves out keeps the reference's number; a limit of a rule that
  * this version does not know is kept in the document and not used.
  */
 final class SiteSettings {
@@ -45,13 +45,15 @@ final class SiteSettings {
     /**
      * The settings of a plant.
      *
+     * @param base what holds where the plant decides nothing
      * @throws Refused where a row names what the engine does not know, or a number cannot be; the place is a pointer
      *                 within the plant
      */
-    static Settings of(Branch plant) {
+    static Settings of(Branch plant, Settings base) {
         return sound(() -> {
-            Settings settings = Settings.standard().with(limits(plant)).with(certainty(plant))
-                    .with(sealRates(plant)).with(instruments(plant)).with(conventions(plant)).with(prices(plant));
+            Settings settings = base.with(limits(plant, base.limits())).with(certainty(plant, base.certainty()))
+                    .with(sealRates(plant, base.sealRates())).with(instruments(plant, base.instruments()))
+                    .with(conventions(plant, base.conventions())).with(prices(plant));
             return plant.text("method").map(code -> settings.with(
                     word(DragMethod::ofCode, code, Pointer.of("method")))).orElse(settings);
         });
@@ -71,9 +73,9 @@ final class SiteSettings {
         }
     }
 
-    private static Limits limits(Branch plant) {
+    private static Limits limits(Branch plant, Limits base) {
         Branch rows = plant.branch(LIMITS).orElse(Branch.EMPTY);
-        Limits limits = Limits.standard();
+        Limits limits = base;
         for (String code : rows.members().keySet()) {
             Optional<Rule> named = Rule.ofCode(code);
             if (named.isEmpty()) {
@@ -82,7 +84,7 @@ final class SiteSettings {
             Pointer place = Pointer.of(LIMITS, code);
             Rule rule = named.get();
             Branch row = below(place, () -> rows.branch(code).orElse(Branch.EMPTY));
-            Limit known = rule.limit();
+            Limit known = base.of(rule);
             OptionalDouble near = below(place, () -> number(row, "near", known.near()));
             OptionalDouble overloaded = below(place, () -> number(row, "overloaded", known.overloaded()));
             if (rule.sense() == Sense.OVER && overloaded.isPresent() && near.orElse(0) > overloaded.getAsDouble()) {
@@ -91,17 +93,17 @@ final class SiteSettings {
             }
             boolean moved = !near.equals(known.near()) || !overloaded.equals(known.overloaded());
             Limit limit = moved ? Limit.ofSite(near, overloaded) : known;
-            boolean enabled = below(place, () -> row.flag("enabled")).orElse(true);
-            limits = limits.with(rule, enabled ? limit : limit.off());
+            boolean enabled = below(place, () -> row.flag("enabled")).orElse(known.on());
+            limits = limits.with(rule, new Limit(limit.near(), limit.overloaded(), enabled, limit.source(),
+                    limit.assumption()));
         }
         return limits;
     }
 
     /** How the site computes; a friction factor of ISO 5048 that it set is taken as it stands. */
-    private static Conventions conventions(Branch plant) {
+    private static Conventions conventions(Branch plant, Conventions standard) {
         Branch rows = plant.branch(LIMITS).orElse(Branch.EMPTY);
         return below(Pointer.of(LIMITS), () -> {
-            Conventions standard = Conventions.standard();
             Optional<Double> onBelt = number(rows, "beltGrip");
             Optional<Double> onBoards = number(rows, "boardGrip");
             Conventions chosen = onBelt.isEmpty() && onBoards.isEmpty() ? standard
@@ -136,16 +138,15 @@ final class SiteSettings {
         return rows.flag(key).orElse(true);
     }
 
-    private static Certainty certainty(Branch plant) {
+    private static Certainty certainty(Branch plant, Certainty standard) {
         Branch row = plant.branch(LIMITS).flatMap(limits -> limits.branch(CERTAINTY)).orElse(Branch.EMPTY);
-        Certainty standard = Certainty.standard();
         Pointer place = Pointer.of(LIMITS, CERTAINTY);
         return below(place, () -> new Certainty(number(row, "overloaded").orElse(standard.overloaded()),
                 number(row, "undecided").orElse(standard.undecided()), number(row, "near").orElse(standard.near())));
     }
 
-    private static SealRates sealRates(Branch plant) {
-        SealRates rates = SealRates.standard();
+    private static SealRates sealRates(Branch plant, SealRates base) {
+        SealRates rates = base;
         List<Branch> rows = plant.branches("sealRates");
         for (int i = 0; i < rows.size(); i++) {
             Pointer place = Pointer.of("sealRates").child(i);
@@ -165,8 +166,8 @@ final class SiteSettings {
         return rates;
     }
 
-    private static Instruments instruments(Branch plant) {
-        Instruments instruments = Instruments.standard();
+    private static Instruments instruments(Branch plant, Instruments base) {
+        Instruments instruments = base;
         List<Branch> rows = plant.branches("instruments");
         for (int i = 0; i < rows.size(); i++) {
             Pointer place = Pointer.of("instruments").child(i);

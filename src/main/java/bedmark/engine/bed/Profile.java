@@ -133,6 +133,11 @@ public final class Profile {
         return most;
     }
 
+    /** Level (m) where the last quarter of the zone begins. */
+    public Uncertain levelAtLastQuarter() {
+        return levelAt(length.times(0.75));
+    }
+
     /** Greatest less least depth over the last quarter of the zone (m). */
     public Uncertain changeOverLastQuarter() {
         Uncertain start = length.times(0.75);

@@ -1,6 +1,7 @@
 package bedmark.engine.bed;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * The space between the skirtboards over a trough of three equal rolls, and the bed that lies in it.
@@ -26,6 +27,47 @@ import bedmark.engine.uncertainty.Uncertain;
  * bed reaches the boards, and negative where it does not; the area is linear in it throughout.
  */
 public final class Section {
+    /** s as it is printed. */
+    public static final Formula WING_RUN = Formula.of("wing-run", "s", "max(0, (b1 − l3)/(2 · cos λ))", "D");
+
+    /** Depth of the trough under the board line. */
+    public static final Formula TROUGH_DEPTH = Formula.of("trough-depth", "d", "s · sin λ", "D");
+
+    /** Rise of the crown. */
+    public static final Formula CROWN_RISE = Formula.of("crown-rise", "r", "b1 · tan θ/4", "S5, R");
+
+    /** Area of trough and crown. */
+    public static final Formula CARRIED = Formula.of("carried-area", "A0",
+            "(l3 + s · cos λ) · s · sin λ + b1² · tan θ/6", "S5, R");
+
+    /** Area of the bed by its mean level. */
+    public static final Formula AREA = Formula.of("bed-area", "A", "A0 + b1 · hn", "D");
+
+    /** Depth at the board by the depth at the centre. */
+    public static final Formula OF_CENTRE = Formula.of("depth-of-centre", "h", "D − d − r", "D");
+
+    /** Run to the edge of a bed that does not reach the boards, by its depth at the centre. */
+    public static final Formula RUN_OF_CENTRE = Formula.of("edge-run", "s′",
+            "(D − l3 · tan θ/4)/(sin λ + cos λ · tan θ/2)", "D");
+
+    /** The same by how far its edge lies under the board line. */
+    public static final Formula RUN_OF_DROP = Formula.of("edge-run", "s′", "s − (f − H)/sin λ", "D");
+
+    /** Level of a bed whose edge lies on the wings. */
+    public static final Formula LEVEL_ON_WINGS = Formula.of("level-under-boards", "h",
+            "((l3 + s′ · cos λ) · s′ · sin λ + (l3 + 2 · s′ · cos λ)² · tan θ/6 − A0)/b1", "D");
+
+    /** Level of a bed within the centre roll, by its depth at the centre. */
+    public static final Formula LEVEL_ON_CENTRE = Formula.of("level-under-boards", "h",
+            "((4 · D/tan θ)² · tan θ/6 − A0)/b1", "D");
+
+    /** The same by how far its edge lies under the board line. */
+    public static final Formula LEVEL_ON_CENTRE_OF_DROP = Formula.of("level-under-boards", "h",
+            "((min(l3, b1) − 4 · (f − H − d)/tan θ)² · tan θ/6 − A0)/b1", "D");
+
+    /** Level of no bed at all. */
+    public static final Formula LEVEL_OF_NOTHING = Formula.of("level-under-boards", "h", "−A0/b1", "D");
+
     private final Uncertain spacing;
     private final Uncertain centreRoll;
     private final Uncertain wingRun;
@@ -100,6 +142,11 @@ public final class Section {
         return spacing.times(crownSlope).over(4);
     }
 
+    /** Area of trough and crown (m²). */
+    public Uncertain carriedArea() {
+        return carried;
+    }
+
     /** Depth that the area of trough and crown would have between the boards alone (m). */
     public Uncertain carriedDepth() {
         return carried.over(spacing);
@@ -135,20 +182,34 @@ public final class Section {
         return level(areaUnderEdge(drop));
     }
 
+    /** Run of the wing (m) to the edge of a bed narrower than the boards, by its depth (m) at the belt's centre. */
+    public Uncertain runOfCentreDepth(Uncertain centreDepth) {
+        return centreDepth.minus(centreRoll.times(crownSlope).over(4))
+                .over(sine.plus(cosine.times(crownSlope).over(2)));
+    }
+
+    /** Run of the wing (m) to the edge of a bed that lies so far (m) under the board line, on the wings. */
+    public Uncertain runUnderBoardLine(Uncertain drop) {
+        return wingRun.minus(drop.over(sine));
+    }
+
+    /** Rise (m) of a bed within the centre roll whose edge would lie so far (m) under the board line; none under 0. */
+    public Uncertain riseUnderBoardLine(Uncertain drop) {
+        return centreRoll.min(spacing).times(crownSlope).over(4).minus(drop.minus(troughDepth));
+    }
+
     /** Area of a bed that is narrower than the boards, by its depth D at the belt's centre (m²). */
     private Uncertain areaUnderCentre(Uncertain centreDepth) {
-        Uncertain run = centreDepth.minus(centreRoll.times(crownSlope).over(4))
-                .over(sine.plus(cosine.times(crownSlope).over(2)));
+        Uncertain run = runOfCentreDepth(centreDepth);
         return run.value() >= 0 ? areaToRun(run) : crownOfRise(centreDepth);
     }
 
     /** Area of a bed whose edge lies so far (m) under the board line (m²). */
     private Uncertain areaUnderEdge(Uncertain drop) {
         if (drop.value() < troughDepth.value()) {
-            return areaToRun(wingRun.minus(drop.over(sine)));
+            return areaToRun(runUnderBoardLine(drop));
         }
-        Uncertain width = centreRoll.min(spacing);
-        return crownOfRise(width.times(crownSlope).over(4).minus(drop.minus(troughDepth)));
+        return crownOfRise(riseUnderBoardLine(drop));
     }
 
     private Uncertain areaToRun(Uncertain run) {

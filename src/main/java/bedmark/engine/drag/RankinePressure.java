@@ -1,6 +1,7 @@
 package bedmark.engine.drag;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Drag of the material by its active pressure on the boards, derived from Rankine's theory of earth pressure [D].
@@ -20,6 +21,13 @@ import bedmark.engine.uncertainty.Uncertain;
  * behind its table, {@code Cs = (2 γ/288) · (1 − sin φ)/(1 + sin φ)} with γ in lb/ft³ [R].
  */
 public final class RankinePressure {
+    /** K as it is printed. */
+    public static final Formula RATIO = Formula.of("pressure-ratio", "K",
+            "(1 − sin φ)/(1 + sin φ)", "D");
+
+    /** The drag as it is printed. */
+    public static final Formula FORMULA = Formula.of("rankine", "Fr", "μw · K · ρ · g · J2", "D");
+
     private static final double GRAVITY = 9.806_65;
 
     private RankinePressure() {
@@ -39,7 +47,7 @@ public final class RankinePressure {
     }
 
     /** K, the ratio of the pressure across to the pressure down. */
-    static Uncertain pressureRatio(Uncertain frictionAngle) {
+    public static Uncertain pressureRatio(Uncertain frictionAngle) {
         Uncertain sine = frictionAngle.sine();
         return Uncertain.ONE.minus(sine).over(sine.plus(1));
     }

@@ -1,6 +1,7 @@
 package bedmark.engine.drag;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Drag of the material by a factor that a site fitted from readings of its own drive [D]: what the other methods take
@@ -19,6 +20,10 @@ import bedmark.engine.uncertainty.Uncertain;
  * 1 lbf/(ft·in²) in N/m³, exact after NIST SP 811 [S11].
  */
 public final class SiteFactor {
+    /** The drag as it is printed. */
+    public static final Formula FORMULA = Formula.of("site", "Fc",
+            "22620.59479 · C · J2", "D");
+
     private static final double NEWTON_PER_CUBIC_METRE = 4.448_221_615_260_5 / (0.3048 * (0.0254 * 0.0254));
 
     private SiteFactor() {

@@ -1,6 +1,7 @@
 package bedmark.engine.drag;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Drag of the material on the skirtboards as a special resistance of ISO 5048 and DIN 22101 [R].
@@ -26,6 +27,14 @@ import bedmark.engine.uncertainty.Uncertain;
  * be mixed with it.
  */
 public final class SpecialResistance {
+    /** The length in which the feed comes to belt speed, as far as the boards reach. */
+    public static final Formula WITHIN = Formula.of("boards-while-speeding", "lw",
+            "min(max(lb, 0), L)", "R");
+
+    /** The drag as it is printed. */
+    public static final Formula FORMULA = Formula.of("iso-5048", "Fi",
+            "μ2 · Iv² · ρ · g/b1² · (lw/((v + v0)/2)² + (L − lw)/v²)", "R");
+
     private static final double GRAVITY = 9.806_65;
 
     private SpecialResistance() {
@@ -34,11 +43,16 @@ public final class SpecialResistance {
     /** Drag on both boards over the whole zone (N); belt speed and {@code v + v0} are positive. */
     public static Uncertain drag(Uncertain boardGrip, Uncertain volumeFlow, Uncertain density, Uncertain beltSpeed,
             Uncertain feedVelocity, Uncertain spacing, Uncertain accelerationLength, Uncertain length) {
-        Uncertain within = accelerationLength.max(Uncertain.ZERO).min(length);
+        Uncertain within = within(accelerationLength, length);
         Uncertain perLength = boardGrip.times(volumeFlow.square()).times(density).times(GRAVITY)
                 .over(spacing.square());
         Uncertain meanSpeed = beltSpeed.plus(feedVelocity).over(2);
         return perLength.times(within.over(meanSpeed.square())
                 .plus(length.minus(within).over(beltSpeed.square())));
+    }
+
+    /** Length (m) of the boards along which the feed comes to belt speed. */
+    public static Uncertain within(Uncertain accelerationLength, Uncertain length) {
+        return accelerationLength.max(Uncertain.ZERO).min(length);
     }
 }

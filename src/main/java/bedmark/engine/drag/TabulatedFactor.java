@@ -1,6 +1,7 @@
 package bedmark.engine.drag;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Drag of the material by the tabulated skirtboard friction factor: CEMA, <em>Belt Conveyors for Bulk Materials</em>,
@@ -18,6 +19,10 @@ import bedmark.engine.uncertainty.Uncertain;
  * <p>The number is 1 lbf/(ft·in²) in N/m³: 4.448 221 615 260 5/(0.3048 · 0.0254²), exact after NIST SP 811 [S11].
  */
 public final class TabulatedFactor {
+    /** The drag as it is printed. */
+    public static final Formula FORMULA = Formula.of("tabulated", "Ft",
+            "22620.59479 · Cs · J2", "S1");
+
     private static final double NEWTON_PER_CUBIC_METRE = 4.448_221_615_260_5 / (0.3048 * (0.0254 * 0.0254));
 
     private TabulatedFactor() {

@@ -1,6 +1,7 @@
 package bedmark.engine.flow;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 import java.util.Optional;
 
 /**
@@ -16,6 +17,10 @@ import java.util.Optional;
  * </table>
  */
 public final class AccelerationLength {
+    /** The length as it is printed. */
+    public static final Formula FORMULA = Formula.of("acceleration-length", "lb",
+            "(v² − v0²)/(2 · g · (μ1 · cos δ − sin δ))", "R");
+
     private static final double GRAVITY = 9.806_65;
 
     private AccelerationLength() {

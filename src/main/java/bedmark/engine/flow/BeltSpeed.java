@@ -1,6 +1,7 @@
 package bedmark.engine.flow;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Belt speed from what can be read from outside the guards (m/s).
@@ -11,6 +12,12 @@ import bedmark.engine.uncertainty.Uncertain;
  * </pre>
  */
 public final class BeltSpeed {
+    /** By timing, as it is printed. */
+    public static final Formula TIMED = Formula.of("belt-speed-timed", "v", "n · Lb/t", "D");
+
+    /** From a pulley, as it is printed. */
+    public static final Formula AT_PULLEY = Formula.of("belt-speed-pulley", "v", "π · Dp · N", "D");
+
     private BeltSpeed() {
     }
 

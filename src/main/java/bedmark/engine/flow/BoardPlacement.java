@@ -1,6 +1,7 @@
 package bedmark.engine.flow;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Where skirtboards may stand on a belt.
@@ -14,6 +15,22 @@ import bedmark.engine.uncertainty.Uncertain;
  * <p>B belt width, b1 spacing, l3 centre roll, s run of the wing inside the boards (m).
  */
 public final class BoardPlacement {
+    /** The widest spacing as it is printed. */
+    public static final Formula WIDEST = Formula.of("widest-spacing", "bw", "2 · B/3", "S8");
+
+    /** The same for free-flowing material. */
+    public static final Formula WIDEST_FREE_FLOWING = Formula.of("widest-spacing", "bw", "B/2", "S8");
+
+    /** The least edge as it is printed; 0.9 in in metres. */
+    public static final Formula LEAST_EDGE = Formula.of("least-edge", "em",
+            "0.055 · B + 0.02286", "S12");
+
+    /** The free edge as it is printed. */
+    public static final Formula FREE_EDGE = Formula.of("free-edge", "e",
+            "(B − l3)/2 − s", "D");
+    /** The same where the boards stand over the centre roll. */
+    public static final Formula FREE_EDGE_ON_CENTRE = Formula.of("free-edge", "e", "(B − b1)/2", "D");
+
     private BoardPlacement() {
     }
 

@@ -1,6 +1,7 @@
 package bedmark.engine.flow;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Force that brings the feed to belt speed [form confirmed by S3].
@@ -11,6 +12,9 @@ import bedmark.engine.uncertainty.Uncertain;
  * {@code Tam = 2.8755e-4 Q (V − V0)}, short ton/h and ft/min, takes g as 32.2 ft/s² [R]: 0.08 % off.
  */
 public final class LoadingForce {
+    /** The force as it is printed. */
+    public static final Formula FORMULA = Formula.of("loading-force", "Fl", "Q · (v − v0)", "S3");
+
     private LoadingForce() {
     }
 

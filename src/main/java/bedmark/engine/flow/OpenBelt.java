@@ -1,6 +1,7 @@
 package bedmark.engine.flow;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 import java.util.Optional;
 
 /**
@@ -17,6 +18,19 @@ import java.util.Optional;
  * flat belt l3 has no part in it; a centre roll wider than the usable width counts as far as the latter.
  */
 public final class OpenBelt {
+    /** The usable width as it is printed. */
+    public static final Formula USABLE = Formula.of("usable-width", "b", "0.9 · B − 0.05", "S5");
+
+    /** The same for belts over 2 m. */
+    public static final Formula USABLE_WIDE = Formula.of("usable-width", "b", "B − 0.25", "S5");
+
+    /** The area as it is printed. */
+    public static final Formula AREA = Formula.of("open-belt-area", "S",
+            "(l3 + (b − l3) · cos λ)² · tan θ/6 + (l3 + (b − l3)/2 · cos λ) · (b − l3)/2 · sin λ", "S5, R");
+
+    /** The same on a flat belt, or where the centre roll takes all of the usable width. */
+    public static final Formula AREA_FLAT = Formula.of("open-belt-area", "S", "b² · tan θ/6", "S5, R");
+
     private OpenBelt() {
     }
 

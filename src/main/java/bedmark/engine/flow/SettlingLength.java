@@ -1,6 +1,7 @@
 package bedmark.engine.flow;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Length that a loading zone needs for its bed and its dust to settle: the longest of those conventions that a site
@@ -15,6 +16,13 @@ public final class SettlingLength {
     private static final Uncertain LEAST = Uncertain.exact(3 * 0.3048);
 
     private SettlingLength() {
+    }
+
+    /** The length as it is printed. */
+    public static Formula formula(LengthConventions conventions, boolean highAirFlow) {
+        String first = !conventions.bySpeed() ? "0" : highAirFlow ? "Li + 1.8 · v" : "Li + 1.2 · v";
+        String others = (conventions.byAcceleration() ? ", lb" : "") + (conventions.least() ? ", 0.9144" : "");
+        return Formula.of("settling-length", "Ls", others.isEmpty() ? first : "max(" + first + others + ")", "S9, R");
     }
 
     /** The length (m); 0 where the site goes by no convention. */

@@ -1,6 +1,7 @@
 package bedmark.engine.seal;
 
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.working.Formula;
 
 /**
  * Drag of the skirt seals, segment by segment.
@@ -12,6 +13,9 @@ import bedmark.engine.uncertainty.Uncertain;
  * equals the convention for μ N′ = 43.78 N/m. The multipliers are those of {@link SealRates}.
  */
 public final class SealDrag {
+    /** The drag of one segment as it is printed. */
+    public static final Formula FORMULA = Formula.of("seal-segment", "Fk", "q · k · ℓ", "S1");
+
     private SealDrag() {
     }
 

@@ -1,0 +1,46 @@
+package bedmark.command;
+
+import bedmark.document.Defect;
+import bedmark.document.Refused;
+import bedmark.json.ReferenceData;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Parameters;
+
+/** Checks the files of reference data in a folder. */
+@Command(name = "check", mixinStandardHelpOptions = true,
+        description = "Checks the reference files of a folder; names file, line, key and the fix.",
+        footer = {"", "Exit codes: 0 all sound; 3 something is wrong."})
+final class ReferenceCheckCommand implements Callable<Integer> {
+    private final Surroundings surroundings;
+
+    @Parameters(paramLabel = "DIR", description = "The folder.")
+    private Path folder;
+
+    ReferenceCheckCommand(Surroundings surroundings) {
+        this.surroundings = surroundings;
+    }
+
+    @Override
+    public Integer call() {
+        if (!Files.isDirectory(folder)) {
+            throw new Refused(Defect.in(folder.toString(), "folder-absent"));
+        }
+        List<ReferenceData.Finding> findings = ReferenceData.check(folder);
+        findings.forEach(finding -> surroundings.err().println(place(finding)
+                + surroundings.wording().sentence(finding.defect())));
+        if (findings.isEmpty()) {
+            surroundings.out().println(surroundings.words().text("command.reference.sound", folder));
+        }
+        return findings.isEmpty() ? ExitCode.FINE : ExitCode.UNREADABLE;
+    }
+
+    /** File, line, column and key, as compilers write them. */
+    private static String place(ReferenceData.Finding finding) {
+        return finding.file().isEmpty() ? "bedmark: " : finding.file() + ":" + finding.line() + ":" + finding.column()
+                + ": " + (finding.key().isEmpty() ? "" : finding.key() + ": ");
+    }
+}

@@ -1,5 +1,7 @@
 package bedmark.screen;
 
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
 import bedmark.screen.start.StartModel;
 import bedmark.screen.start.StartView;
 import java.nio.file.Files;
@@ -216,7 +218,10 @@ class ScreenPicturesTest {
             return null;
         });
         Preferences now = app.workplace().preferences();
-        app.picture(PICTURES.resolve(name + "-" + orientation + (now.night() ? "-night" : "-day")
-                + "-" + now.locale().getLanguage() + (now.gloves() ? "-gloved" : "") + ".png"));
+        String file = name + "-" + orientation + (now.night() ? "-night" : "-day") + "-"
+                + now.locale().getLanguage() + (now.gloves() ? "-gloved" : "") + ".png";
+        app.picture(PICTURES.resolve(file));
+        assertTrue(Files.readString(PICTURES.resolve("README.md")).contains("(" + file + ")"),
+                () -> file + " is not on the page of the pictures");
     }
 }

@@ -184,7 +184,8 @@ class ScreenScanTest {
     @Test
     void scanMissesTheCautionWhereThereIsNone() throws Exception {
         Glass.on(() -> {
-            Scene with = Glass.show(new Pane(new CautionStrip("Stay outside.")), Light.DAY, Density.standard(), 400, 300);
+            Scene with = Glass.show(new Pane(new CautionStrip("Stay outside.")), Light.DAY,
+                    Density.standard(), 400, 300);
             assertTrue(ScreenScan.hasCaution(with));
             with.getWindow().hide();
             Scene without = Glass.show(new Pane(new CautionStrip("")), Light.DAY, Density.standard(), 400, 300);

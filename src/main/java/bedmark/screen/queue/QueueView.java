@@ -141,7 +141,8 @@ public final class QueueView implements Screen {
 
     private static LevelShape shape(SurveyLine line) {
         return line.inspectionStatus() != InspectionStatus.INSPECTED || line.level().isEmpty()
-                ? LevelShape.NOT_INSPECTED : LevelShape.valueOf(line.level().toUpperCase(Locale.ROOT).replace('-', '_'));
+                ? LevelShape.NOT_INSPECTED
+                : LevelShape.valueOf(line.level().toUpperCase(Locale.ROOT).replace('-', '_'));
     }
 
     private void export() {

@@ -18,7 +18,8 @@ public record Density(double dpi, Hand hand) {
     private static final double MM_PER_INCH = 25.4;
     private static final double GAP_MM = 0.85;
     private static final Pattern LENGTH = Pattern.compile("\\b(\\d+(?:\\.\\d+)?)mm\\b");
-    private static final Pattern TARGET = Pattern.compile("\\b(target-height|secondary-height|foot-height|entry-tall|entry-flat)\\b");
+    private static final Pattern TARGET = Pattern.compile(
+            "\\b(target-height|secondary-height|foot-height|entry-tall|entry-flat)\\b");
 
     public Density {
         if (!(dpi > 0)) {

@@ -113,7 +113,8 @@ final class RowView extends VBox {
     }
 
     private QualityButton quality(Slot slot) {
-        QualityButton button = new QualityButton(Quality.MEASURED, mark -> wording.text("screen.quality." + mark.code()),
+        QualityButton button = new QualityButton(Quality.MEASURED,
+                mark -> wording.text("screen.quality." + mark.code()),
                 mark -> {
                     model.activate(slot);
                     model.mark(mark);

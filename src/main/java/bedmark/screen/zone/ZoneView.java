@@ -1,6 +1,7 @@
 package bedmark.screen.zone;
 
 import bedmark.document.Branch;
+import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.engine.Assessment;
@@ -66,8 +67,7 @@ public final class ZoneView implements Screen {
     private final BorderPane body = new BorderPane();
     private final VBox head;
     private final javafx.scene.Node foot;
-    private final boolean gloved;
-    private boolean large;
+    private final boolean large;
     private Optional<Branch> pulled = Optional.empty();
 
     public ZoneView(Workplace workplace, ZoneModel model, RoundModel round, Navigator navigator, Density density) {
@@ -75,7 +75,7 @@ public final class ZoneView implements Screen {
         this.model = model;
         this.round = round;
         this.navigator = navigator;
-        this.gloved = density.hand() == Hand.GLOVED;
+        this.large = density.hand() == Hand.GLOVED;
         this.wording = workplace.wording();
         model.unitsProperty().set(wording.units());
         model.localeProperty().set(wording.words().locale());
@@ -248,12 +248,21 @@ public final class ZoneView implements Screen {
         told.atDesign().ifPresent(advice::add);
         return new Verdict(LevelShape.valueOf(found.level().name()),
                 wording.text("verdict.level." + found.level().code()), told.sentence(), told.sure().orElse(""),
-                told.figures().stream().map(figure -> new Figure(figure.label(), figure.number(), figure.rest())).toList(),
+                told.figures().stream().map(figure -> new Figure(figure.label(), figure.number(), figure.rest()))
+                        .toList(),
                 advice.isEmpty() ? Optional.empty() : Optional.of(String.join(" ", advice)));
     }
 
+    /** A defect with the field by its name, where it has one: the place in the document means nothing to a person. */
+    private Defect named(Defect defect) {
+        return Optional.of(defect.where()).filter(where -> where.startsWith("/"))
+                .flatMap(where -> model.setting().form().fieldAt(Pointer.parse(where)))
+                .map(field -> new Defect(defect.code(), field.head().label().in(wording.words().language()),
+                        defect.details())).orElse(defect);
+    }
+
     private Verdict impossible(ZoneModel.Outcome outcome) {
-        String why = outcome.impossible().map(refused -> wording.sentence(refused.defect())).orElse("");
+        String why = outcome.impossible().map(refused -> wording.sentence(named(refused.defect()))).orElse("");
         return new Verdict(LevelShape.INCOMPLETE, wording.text("verdict.level.incomplete"),
                 wording.text("verdict.impossible", why), "", List.of(), Optional.empty());
     }
@@ -336,7 +345,6 @@ public final class ZoneView implements Screen {
             body.setCenter(result);
         }
         entry.turned(portrait);
-        large = gloved && !portrait;
         result.getChildren().remove(form.caution());
         form.shrink(large);
         hideRules();

@@ -98,6 +98,7 @@ class TokensTest {
 
     @Test
     void onlyTheTokenFileHoldsColours() {
+        // The one value that has the name of a colour and is none: how the edges of type are smoothed.
         String theme = look().replace("-fx-font-smoothing-type: gray;", "");
         assertFalse(Pattern.compile("#[0-9A-Fa-f]{3,8}\\b|rgba?\\(|hsba?\\(").matcher(theme).find());
         for (String word : List.of("white", "black", "gray", "grey", "red", "blue")) {

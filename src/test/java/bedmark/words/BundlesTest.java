@@ -31,7 +31,7 @@ class BundlesTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"defect", "entry", "judgement", "unit"})
+    @ValueSource(strings = {"defect", "entry", "judgement", "unit", "working"})
     void bothLanguagesHaveTheSameKeysAndPlaceholders(String bundle) throws IOException {
         Properties english = load(bundle);
         Properties spanish = load(bundle + "_es");

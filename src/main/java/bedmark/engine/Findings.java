@@ -4,6 +4,7 @@ import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.uncertainty.Tape;
 import bedmark.engine.uncertainty.Traced;
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.verdict.Chance;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Judgement;
 import bedmark.engine.verdict.Level;
@@ -15,11 +16,33 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 
 /** The rules of one zone, judged at one feed. */
 final class Findings {
     private static final String OF_THIS_WALK = "/readings/";
     private static final Rule[] RULES = Rule.values();
+
+    /**
+     * The rules of a zone at both feeds.
+     *
+     * @param atDesign nothing where the zone cannot be judged at design throughput
+     */
+    record AtFeeds(Findings today, Optional<Findings> atDesign) {
+
+        boolean isDoubtful(Set<Rule> rules) {
+            return today.isDoubtful(rules) || atDesign.isPresent() && atDesign.get().isDoubtful(rules);
+        }
+
+        void judge(Set<Rule> rules, MonteCarlo drawn) {
+            today.judge(rules, drawn.chances());
+            atDesign.ifPresent(design -> design.judge(rules, drawn.chancesAtDesign()));
+        }
+
+        boolean isDrawn() {
+            return today.isDrawn() || atDesign.isPresent() && atDesign.get().isDrawn();
+        }
+    }
 
     private final Tape tape;
     private final Settings settings;
@@ -89,6 +112,29 @@ final class Findings {
     private static Estimate widened(Estimate estimate, double spread) {
         return spread == 0 ? estimate
                 : new Estimate(estimate.value(), Math.hypot(estimate.standardUncertainty(), spread));
+    }
+
+    /** Whether one of the rules is too near to where its level changes for the first order alone. */
+    private boolean isDoubtful(Set<Rule> rules) {
+        for (Rule rule : rules) {
+            if (judged.containsKey(rule) && Judgement.isDoubtful(judged.get(rule), settings.certainty())) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private boolean isDrawn() {
+        return judged.values().stream().anyMatch(Finding::drawn);
+    }
+
+    /** Judges some rules by what came of drawing their readings. */
+    private void judge(Set<Rule> rules, Map<Rule, Chance> chances) {
+        for (Rule rule : rules) {
+            if (judged.containsKey(rule) && chances.containsKey(rule)) {
+                judged.put(rule, Judgement.drawn(judged.get(rule), chances.get(rule), settings.certainty()));
+            }
+        }
     }
 
     /** Every rule that could be evaluated, once, in their order. */

@@ -9,8 +9,9 @@ import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Judgement;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Limit;
+import bedmark.engine.verdict.Repeat;
 import bedmark.engine.verdict.Rule;
-import java.util.ArrayList;
+import java.util.Collection;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
@@ -47,7 +48,7 @@ final class Findings {
     private final Tape tape;
     private final Settings settings;
     private final Map<Rule, Finding> judged = new EnumMap<>(Rule.class);
-    private final List<Deduced<Uncertain>> numbers = new ArrayList<>(RULES.length);
+    private final Map<Rule, Deduced<Uncertain>> numbers = new EnumMap<>(Rule.class);
 
     private Findings(ZoneFacts zone) {
         tape = zone.sources().tape();
@@ -84,9 +85,7 @@ final class Findings {
 
     private void judge(Rule rule, Observations observations, Optional<ConveyorLoad> load) {
         Deduced<Uncertain> observed = observations.of(rule);
-        if (rule != Rule.SKIRTS_OVER_BUDGET) {
-            numbers.add(observed);
-        }
+        numbers.put(rule, observed);
         Limit limit = observations.limit(rule);
         if (!limit.on()) {
             return;
@@ -146,9 +145,9 @@ final class Findings {
         return judged.containsKey(rule);
     }
 
-    /** What was observed, known or not. */
-    List<Deduced<Uncertain>> numbers() {
-        return numbers;
+    /** What was observed, known or not; of what all zones of the conveyor do together this zone's part. */
+    Collection<Deduced<Uncertain>> numbers() {
+        return numbers.values();
     }
 
     /** The worst level of all, or that of a zone which lacks a required reading. */
@@ -160,10 +159,15 @@ final class Findings {
         return level;
     }
 
-    /** The reading that leads in the first rule which is undecided. */
-    Optional<String> repeat() {
-        return judged.values().stream().filter(finding -> finding.level() == Level.UNDECIDED)
-                .flatMap(finding -> finding.leadingReading().stream()).findFirst();
+    /** The reading to take again for the first rule which is undecided. */
+    Optional<Repeat> repeat() {
+        for (Finding finding : judged.values()) {
+            if (finding.level() == Level.UNDECIDED) {
+                Deduced<Uncertain> number = numbers.get(finding.rule());
+                return new Repetition(finding, settings.certainty()).of(tape.sensitivities(number.get()));
+            }
+        }
+        return Optional.empty();
     }
 
     /** A limit of one rule as it stands for a whole that it is a share of. */

@@ -26,7 +26,7 @@ final class GrowthSuite implements Suite {
                 }), "", 1.1, true),
                 new Row("growth with zones of one conveyor, 8 to 32: exponent", exponent(8, 32, count -> {
                     List<LoadingZone> zones = Collections.nCopies(count, BenchZones.of(4));
-                    return () -> Engine.assessConveyor(zones, 0, settings).size();
+                    return () -> Engine.assessConveyor(zones, 0, settings).zones().size();
                 }), "", 1.1, true));
     }
 

@@ -42,27 +42,34 @@ final class Appraisal {
         return design.orElse(today);
     }
 
-    Assessment judge(Optional<ConveyorLoad> loadToday, Optional<ConveyorLoad> loadAtDesign) {
-        Map<Result, Deduced<Uncertain>> results = results();
-        Map<DragMethod, Deduced<Uncertain>> methods = today.methods();
+    /** Whether some depth is so uncertain that its square is no longer near enough to a straight line. */
+    boolean isCoarse() {
+        return today.profile().isKnown() && Assumptions.isCoarse(points(today.profile().get()));
+    }
+
+    /** The rules at today's feed and, where it can be known, at design throughput. */
+    Findings.AtFeeds judge(Optional<ConveyorLoad> loadToday, Optional<ConveyorLoad> loadAtDesign) {
         Findings findings = Findings.today(today, loadToday);
-        Optional<Findings> atDesign = design.map(feed -> findings.atDesign(today, feed, loadAtDesign));
+        return new Findings.AtFeeds(findings, design.map(feed -> findings.atDesign(today, feed, loadAtDesign)));
+    }
+
+    Assessment assessment(Findings.AtFeeds judged, Optional<ConveyorLoad> load) {
+        Map<Result, Deduced<Uncertain>> results = Results.of(today);
+        Map<DragMethod, Deduced<Uncertain>> methods = today.methods();
+        Findings findings = judged.today();
         Requirements requirements = new Requirements(zone);
         List<String> required = requirements.required(today.materialDrag());
         List<Deduced<?>> numbers = new ArrayList<>(results.values());
         numbers.addAll(methods.values());
         numbers.addAll(findings.numbers());
         List<DepthPoint> profile = today.profile().value().map(this::points).orElse(List.of());
-        List<Assumption> assumptions = new Assumptions(today, methods).all(profile, design.isPresent());
-        loadToday.filter(sum -> sum.lacking() > 0 && findings.has(Rule.SKIRTS_OVER_BUDGET))
-                .ifPresent(sum -> assumptions.add(
-                        Assumption.of("conveyor-sum-lower-bound", Integer.toString(sum.lacking()))));
-        List<Remedy> remedies = new Remedies(zone, findings.all(), othersShare(loadToday)).all();
+        List<Assumption> assumptions = new Assumptions(today, methods).all(profile, judged, load);
+        List<Remedy> remedies = new Remedies(zone, findings.all(), othersShare(load)).all();
         return new Assessment(today.materialDrag().value().map(drag -> today.method()),
                 estimates(Result.class, results), estimates(DragMethod.class, methods), new Spread(today).of(methods),
                 energyKind(), profile, findings.level(!required.isEmpty()),
-                atDesign.map(then -> then.level(!required.isEmpty())), findings.all(),
-                atDesign.map(Findings::all).orElse(List.of()), allowedDepths(), remedies, assumptions,
+                judged.atDesign().map(then -> then.level(!required.isEmpty())), findings.all(),
+                judged.atDesign().map(Findings::all).orElse(List.of()), allowedDepths(), remedies, assumptions,
                 requirements.all(required, numbers), required, zone.sidesWithoutSeals(),
                 today.skirtPower().value().map(tape::shares).orElse(List.<Share>of()), leading(), findings.repeat());
     }
@@ -70,40 +77,6 @@ final class Appraisal {
     private double othersShare(Optional<ConveyorLoad> load) {
         return load.isPresent() && today.driveShare().isKnown()
                 ? load.get().share().value() - today.driveShare().get().value() : 0;
-    }
-
-    private Map<Result, Deduced<Uncertain>> results() {
-        Map<Result, Deduced<Uncertain>> all = new EnumMap<>(Result.class);
-        all.put(Result.BELT_SPEED, zone.beltSpeed());
-        all.put(Result.MEAN_SQUARE_DEPTH, today.meanSquare());
-        all.put(Result.MEAN_DEPTH, today.meanDepth());
-        all.put(Result.DEEPEST_DEPTH, today.deepest());
-        all.put(Result.SQUARE_OF_MEAN_SHARE, today.squareOfMeanShare());
-        all.put(Result.MATERIAL_DRAG, today.materialDrag());
-        all.put(Result.SEAL_DRAG, zone.sealDrag());
-        all.put(Result.SKIRT_DRAG, today.skirtDrag());
-        all.put(Result.LOADING_FORCE, today.loadingForce());
-        all.put(Result.SKIRT_POWER, today.skirtPower());
-        all.put(Result.DRIVE_POWER, today.drivePower());
-        all.put(Result.DRIVE_SHARE, today.driveShare());
-        all.put(Result.RUNNING_SHARE, runningShare());
-        all.put(Result.BED_AREA, today.area());
-        all.put(Result.IMPLIED_THROUGHPUT, today.impliedFlow());
-        all.put(Result.FILL, today.fill());
-        all.put(Result.BED_SPEED_RATIO, today.bedSpeedRatio());
-        all.put(Result.DESIGN_DEPTH, zone.designDepth());
-        all.put(Result.REFERENCE_DEPTH, zone.referenceDepth());
-        all.put(Result.ACCELERATION_LENGTH, zone.accelerationLength());
-        all.put(Result.ENERGY, today.energy());
-        return all;
-    }
-
-    /** Share of the shaft power that was running; nothing where none was read. */
-    private Deduced<Uncertain> runningShare() {
-        if (zone.zone().get(Datum.RUNNING_POWER).filter(power -> power.value() > 0).isEmpty()) {
-            return Deduced.nothing();
-        }
-        return Deduced.from(today.drivePower(), Observations.runningShaftPower(zone), Uncertain::over);
     }
 
     private <K extends Enum<K>> Map<K, Estimate> estimates(Class<K> keys, Map<K, Deduced<Uncertain>> numbers) {

@@ -10,6 +10,7 @@ import bedmark.engine.verdict.Component;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Remedy;
+import bedmark.engine.verdict.Repeat;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.Comparator;
@@ -46,7 +47,7 @@ public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> resu
         Optional<Level> levelAtDesignFeed, List<Finding> findings, List<Finding> findingsAtDesign,
         List<AllowedDepth> allowedDepths, List<Remedy> remedies, List<Assumption> assumptions, List<String> missing,
         List<String> missingRequired, List<Side> sidesWithoutSeals, List<Share> powerShares,
-        Optional<Component> leading, Optional<String> repeat) {
+        Optional<Component> leading, Optional<Repeat> repeat) {
 
     /** Where the energy of an assessment is counted. */
     public enum EnergyKind {

@@ -7,10 +7,12 @@ import bedmark.engine.drag.DragMethod;
 import bedmark.engine.seal.SealRates;
 import bedmark.engine.seal.SealSegment;
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.verdict.Rule;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 
 /** What was taken for granted in the results of one zone. */
@@ -31,17 +33,19 @@ final class Assumptions {
     /**
      * All of them.
      *
-     * @param profile  the depths of today
-     * @param atDesign whether the zone could be judged at design throughput
+     * @param profile the depths of today
+     * @param judged  the rules
+     * @param load    the conveyor's
      */
-    List<Assumption> all(List<DepthPoint> profile, boolean atDesign) {
+    List<Assumption> all(List<DepthPoint> profile, Findings.AtFeeds judged, Optional<ConveyorLoad> load) {
         Set<Assumption> all = new LinkedHashSet<>();
         geometry(all);
         speed(all);
         material(all);
         bed(all, profile);
         seals(all);
-        flow(all, atDesign);
+        flow(all, judged.atDesign().isPresent());
+        verdict(all, judged, load);
         return new ArrayList<>(all);
     }
 
@@ -92,7 +96,7 @@ final class Assumptions {
             if (today.profile().get().level(i).value() < 0) {
                 all.add(Assumption.of("bed-below-boards", station.raw().name()));
             }
-            if (point.depth().value() > 0 && point.depth().standardUncertainty() > COARSE * point.depth().value()) {
+            if (isCoarse(point)) {
                 all.add(Assumption.of("first-order-coarse", station.raw().name()));
             }
         }
@@ -127,6 +131,29 @@ final class Assumptions {
             all.add(Assumption.of("verdict-holds-at-todays-feed",
                     read ? Datum.DESIGN_THROUGHPUT.pointer() : Datum.THROUGHPUT.pointer()));
         }
+    }
+
+    private void verdict(Set<Assumption> all, Findings.AtFeeds judged, Optional<ConveyorLoad> load) {
+        if (judged.isDrawn()) {
+            all.add(Assumption.of("monte-carlo-used", Integer.toString(zone.settings().conventions().trials())));
+        }
+        if (load.isPresent() && load.get().lacking() > 0 && judged.today().has(Rule.SKIRTS_OVER_BUDGET)) {
+            all.add(Assumption.of("conveyor-sum-lower-bound", Integer.toString(load.get().lacking())));
+        }
+    }
+
+    /** Whether some depth is so uncertain that its square is no longer near enough to a straight line. */
+    static boolean isCoarse(List<DepthPoint> profile) {
+        for (DepthPoint point : profile) {
+            if (isCoarse(point)) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private static boolean isCoarse(DepthPoint point) {
+        return point.depth().value() > 0 && point.depth().standardUncertainty() > COARSE * point.depth().value();
     }
 
     private void fromRegister(Set<Assumption> all, Deduced<Uncertain> used, Datum read, Datum registered) {

@@ -24,7 +24,7 @@ public record Conventions(Reading beltGrip, Reading boardGrip, LengthConventions
     private static final double GRIP_SPREAD = 0.1 / Math.sqrt(3);
     private static final Conventions STANDARD = new Conventions(
             new Reading("/plant/limits/beltGrip", 0.6, GRIP_SPREAD),
-            new Reading("/plant/limits/boardGrip", 0.6, GRIP_SPREAD), LengthConventions.ALL, true, true, 4_000);
+            new Reading("/plant/limits/boardGrip", 0.6, GRIP_SPREAD), LengthConventions.ALL, true, true, 2_000);
 
     /** @throws ImpossibleReading where a factor is not above 0 and up to 1, or the trials are not 0…1 000 000 */
     public Conventions {

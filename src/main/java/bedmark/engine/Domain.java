@@ -33,6 +33,11 @@ public enum Domain {
         this.highest = highest;
     }
 
+    /** Whether the number may be. */
+    boolean holds(double value) {
+        return value >= lowest && value <= highest && !(lowest == 0 && value > 0 && value < LEAST);
+    }
+
     /**
      * Refuses what cannot be.
      *
@@ -47,7 +52,7 @@ public enum Domain {
         if (value == 0 && lowest > 0) {
             throw new ImpossibleReading("reading-zero", reading.name());
         }
-        if (value < lowest || value > highest || (lowest == 0 && value > 0 && value < LEAST)) {
+        if (!holds(value)) {
             throw new ImpossibleReading("reading-out-of-range", reading.name(), Double.toString(value),
                     Double.toString(lowest), Double.toString(highest));
         }

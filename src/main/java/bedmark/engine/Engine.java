@@ -1,11 +1,10 @@
 package bedmark.engine;
 
 import bedmark.engine.uncertainty.ImpossibleReading;
-import java.util.ArrayList;
-import java.util.Collections;
+import bedmark.engine.verdict.Rule;
 import bedmark.engine.working.Working;
+import java.util.EnumSet;
 import java.util.List;
-import java.util.Optional;
 
 /** The way into the engine: pure functions. */
 public final class Engine {
@@ -18,7 +17,7 @@ public final class Engine {
      * @throws ImpossibleReading where a reading cannot be
      */
     public static Assessment assess(LoadingZone zone, Settings settings) {
-        return assessConveyor(List.of(zone), 0, settings).get(0);
+        return assessConveyor(List.of(zone), 0, settings).zones().get(0);
     }
 
     /**
@@ -26,27 +25,30 @@ public final class Engine {
      *
      * @param zones      those of which a survey can be used, each with the same conveyor
      * @param unsurveyed how many more loading zones the conveyor has
-     * @return the assessments in the order of the zones
+     * @return the conveyor as a whole, with the assessments of its zones in their order
      * @throws ImpossibleReading where a reading cannot be; {@link #check} tells before
      */
-    public static List<Assessment> assessConveyor(List<LoadingZone> zones, int unsurveyed, Settings settings) {
+    public static ConveyorAssessment assessConveyor(List<LoadingZone> zones, int unsurveyed, Settings settings) {
         zones.forEach(Engine::check);
-        List<Appraisal> appraisals = new ArrayList<>(zones.size());
-        List<FeedFacts> feedsToday = new ArrayList<>(zones.size());
-        List<FeedFacts> feedsAtDesign = new ArrayList<>(zones.size());
-        for (LoadingZone zone : zones) {
-            Appraisal appraisal = new Appraisal(zone, settings);
-            appraisals.add(appraisal);
-            feedsToday.add(appraisal.today());
-            feedsAtDesign.add(appraisal.atDesign());
+        return new ConveyorAppraisal(List.copyOf(zones), unsurveyed, settings).assess();
+    }
+
+    /**
+     * Draws the readings of the loading zones of one conveyor many times (JCGM 101:2008).
+     *
+     * @param zones  each with the same conveyor
+     * @param seed   the same seed gives the same numbers on every device
+     * @param trials how often, 1…1 000 000
+     * @return one for each zone, in their order
+     * @throws ImpossibleReading where a reading cannot be, or {@code trials-impossible}
+     */
+    public static List<MonteCarlo> monteCarlo(List<LoadingZone> zones, Settings settings, long seed, int trials) {
+        if (trials < 1 || trials > Conventions.MOST_TRIALS) {
+            throw new ImpossibleReading("trials-impossible", "/plant/limits/monteCarloTrials",
+                    Integer.toString(trials), Integer.toString(Conventions.MOST_TRIALS));
         }
-        Optional<ConveyorLoad> today = ConveyorLoad.of(feedsToday, unsurveyed);
-        Optional<ConveyorLoad> atDesign = ConveyorLoad.of(feedsAtDesign, unsurveyed);
-        List<Assessment> assessments = new ArrayList<>(zones.size());
-        for (Appraisal appraisal : appraisals) {
-            assessments.add(appraisal.judge(today, atDesign));
-        }
-        return Collections.unmodifiableList(assessments);
+        zones.forEach(Engine::check);
+        return new Trials(zones, settings, trials, EnumSet.allOf(Rule.class), true).run(seed);
     }
 
     /**

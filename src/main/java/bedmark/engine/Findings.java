@@ -4,27 +4,51 @@ import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.uncertainty.Tape;
 import bedmark.engine.uncertainty.Traced;
 import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.verdict.Chance;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Judgement;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Limit;
+import bedmark.engine.verdict.Repeat;
 import bedmark.engine.verdict.Rule;
-import java.util.ArrayList;
+import java.util.Collection;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 
 /** The rules of one zone, judged at one feed. */
 final class Findings {
     private static final String OF_THIS_WALK = "/readings/";
     private static final Rule[] RULES = Rule.values();
 
+    /**
+     * The rules of a zone at both feeds.
+     *
+     * @param atDesign nothing where the zone cannot be judged at design throughput
+     */
+    record AtFeeds(Findings today, Optional<Findings> atDesign) {
+
+        boolean isDoubtful(Set<Rule> rules) {
+            return today.isDoubtful(rules) || atDesign.isPresent() && atDesign.get().isDoubtful(rules);
+        }
+
+        void judge(Set<Rule> rules, MonteCarlo drawn) {
+            today.judge(rules, drawn.chances());
+            atDesign.ifPresent(design -> design.judge(rules, drawn.chancesAtDesign()));
+        }
+
+        boolean isDrawn() {
+            return today.isDrawn() || atDesign.isPresent() && atDesign.get().isDrawn();
+        }
+    }
+
     private final Tape tape;
     private final Settings settings;
     private final Map<Rule, Finding> judged = new EnumMap<>(Rule.class);
-    private final List<Deduced<Uncertain>> numbers = new ArrayList<>(RULES.length);
+    private final Map<Rule, Deduced<Uncertain>> numbers = new EnumMap<>(Rule.class);
 
     private Findings(ZoneFacts zone) {
         tape = zone.sources().tape();
@@ -61,9 +85,7 @@ final class Findings {
 
     private void judge(Rule rule, Observations observations, Optional<ConveyorLoad> load) {
         Deduced<Uncertain> observed = observations.of(rule);
-        if (rule != Rule.SKIRTS_OVER_BUDGET) {
-            numbers.add(observed);
-        }
+        numbers.put(rule, observed);
         Limit limit = observations.limit(rule);
         if (!limit.on()) {
             return;
@@ -91,6 +113,29 @@ final class Findings {
                 : new Estimate(estimate.value(), Math.hypot(estimate.standardUncertainty(), spread));
     }
 
+    /** Whether one of the rules is too near to where its level changes for the first order alone. */
+    private boolean isDoubtful(Set<Rule> rules) {
+        for (Rule rule : rules) {
+            if (judged.containsKey(rule) && Judgement.isDoubtful(judged.get(rule), settings.certainty())) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private boolean isDrawn() {
+        return judged.values().stream().anyMatch(Finding::drawn);
+    }
+
+    /** Judges some rules by what came of drawing their readings. */
+    private void judge(Set<Rule> rules, Map<Rule, Chance> chances) {
+        for (Rule rule : rules) {
+            if (judged.containsKey(rule) && chances.containsKey(rule)) {
+                judged.put(rule, Judgement.drawn(judged.get(rule), chances.get(rule), settings.certainty()));
+            }
+        }
+    }
+
     /** Every rule that could be evaluated, once, in their order. */
     List<Finding> all() {
         return List.copyOf(judged.values());
@@ -100,9 +145,9 @@ final class Findings {
         return judged.containsKey(rule);
     }
 
-    /** What was observed, known or not. */
-    List<Deduced<Uncertain>> numbers() {
-        return numbers;
+    /** What was observed, known or not; of what all zones of the conveyor do together this zone's part. */
+    Collection<Deduced<Uncertain>> numbers() {
+        return numbers.values();
     }
 
     /** The worst level of all, or that of a zone which lacks a required reading. */
@@ -114,10 +159,15 @@ final class Findings {
         return level;
     }
 
-    /** The reading that leads in the first rule which is undecided. */
-    Optional<String> repeat() {
-        return judged.values().stream().filter(finding -> finding.level() == Level.UNDECIDED)
-                .flatMap(finding -> finding.leadingReading().stream()).findFirst();
+    /** The reading to take again for the first rule which is undecided. */
+    Optional<Repeat> repeat() {
+        for (Finding finding : judged.values()) {
+            if (finding.level() == Level.UNDECIDED) {
+                Deduced<Uncertain> number = numbers.get(finding.rule());
+                return new Repetition(finding, settings.certainty()).of(tape.sensitivities(number.get()));
+            }
+        }
+        return Optional.empty();
     }
 
     /** A limit of one rule as it stands for a whole that it is a share of. */

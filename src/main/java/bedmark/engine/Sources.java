@@ -58,6 +58,11 @@ final class Sources {
         return new Sources(zone, settings, tape, tape::take);
     }
 
+    /** One drawing of the readings. */
+    static Sources drawn(LoadingZone zone, Settings settings, Draw draw) {
+        return new Sources(zone, settings, new Tape(0), draw::take);
+    }
+
     /** The same readings taken as they stand. */
     Sources certain() {
         return new Sources(this);

@@ -257,10 +257,13 @@ final class ZoneFacts {
                 inputs.toArray(new Deduced<?>[0]));
     }
 
+    /** Ascending within the zone, as they were found; only drawn ones could have come to lie otherwise. */
     private List<Uncertain> positions(List<Station> stations) {
         List<Uncertain> positions = new ArrayList<>(stations.size());
+        Uncertain before = Uncertain.ZERO;
         for (Station station : stations) {
-            positions.add(sources.take(station.position()));
+            before = sources.take(station.position()).max(before).min(length.get());
+            positions.add(before);
         }
         return positions;
     }

@@ -11,6 +11,7 @@ import bedmark.engine.uncertainty.Share;
 import bedmark.engine.verdict.AllowedDepth;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Remedy;
+import bedmark.engine.verdict.Repeat;
 import bedmark.survey.Assessor.Assessed;
 import java.math.BigDecimal;
 import java.util.ArrayList;
@@ -88,7 +89,7 @@ public final class AssessmentWriter {
                 .with("remedies", series(assessment.remedies(), AssessmentWriter::remedy))
                 .with("assumptions", series(assessment.assumptions(), AssessmentWriter::assumption))
                 .with("missing", texts(assessment.missing()));
-        return assessment.repeat().isPresent() ? branch.with("repeat", assessment.repeat().get()) : branch;
+        return assessment.repeat().isPresent() ? repeat(branch, assessment.repeat().get()) : branch;
     }
 
     private static Branch spread(MethodSpread spread) {
@@ -109,6 +110,11 @@ public final class AssessmentWriter {
             }
         }
         return counted;
+    }
+
+    private static Branch repeat(Branch branch, Repeat repeat) {
+        return optional(branch.with("repeat", repeat.reading()).with("repeatFor", repeat.rule().code()),
+                "repeatStandardUncertainty", repeat.standardUncertainty());
     }
 
     private static Branch share(Share share) {

@@ -5,12 +5,14 @@ import bedmark.document.Pointer;
 import bedmark.document.Refused;
 import bedmark.engine.Assessment;
 import bedmark.engine.Assumption;
+import bedmark.engine.ConveyorAssessment;
 import bedmark.engine.Engine;
 import bedmark.engine.LoadingZone;
 import bedmark.engine.Settings;
 import bedmark.engine.uncertainty.ImpossibleReading;
 import java.util.ArrayList;
 import java.util.Collection;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -26,9 +28,35 @@ public final class Assessor {
     private final Register register;
     private final Settings settings;
     private final SiteFactors factors;
+    /** The ids of each conveyor's transfer points, in the register's order. */
+    private final Map<String, List<String>> transfers = new HashMap<>();
 
     /** A survey with what the engine found. */
     public record Assessed(Survey survey, Assessment assessment) {
+    }
+
+    /**
+     * A conveyor on one round.
+     *
+     * @param round    its id; empty where the surveys name none
+     * @param conveyor its id
+     * @param surveys  those that count, in the order of the zones of the assessment
+     */
+    public record AssessedConveyor(String round, String conveyor, List<Survey> surveys,
+            ConveyorAssessment assessment) {
+    }
+
+    /**
+     * What was found of a bundle.
+     *
+     * @param surveys   one for each survey, in their order
+     * @param conveyors each conveyor of each round once, in the order of their first surveys
+     */
+    public record Judged(List<Assessed> surveys, List<AssessedConveyor> conveyors) {
+        public Judged {
+            surveys = List.copyOf(surveys);
+            conveyors = List.copyOf(conveyors);
+        }
     }
 
     /**
@@ -48,6 +76,8 @@ public final class Assessor {
     public Assessor(Register register, Settings reference) {
         this.register = register;
         this.settings = SiteSettings.of(register.document(), reference);
+        register.transfers().values().forEach(transfer ->
+                transfers.computeIfAbsent(transfer.conveyor(), key -> new ArrayList<>()).add(transfer.id()));
         this.factors = SiteSettings.sound(() -> SiteFactors.of(register, settings.instruments()));
     }
 
@@ -88,24 +118,36 @@ public final class Assessor {
      * @throws Refused where a number cannot be; the place is a pointer within the bundle
      */
     public List<Assessed> assess(List<Survey> surveys) {
-        Set<UUID> superseded = Survey.superseded(surveys);
-        Map<Pointer, List<Survey>> drives = new LinkedHashMap<>();
-        for (Survey survey : surveys) {
-            if (!superseded.contains(survey.id())) {
-                drives.computeIfAbsent(drive(survey), key -> new ArrayList<>()).add(survey);
-            }
-        }
+        return judge(surveys).surveys();
+    }
+
+    /**
+     * Judges all surveys of a bundle, and the conveyors that they belong to.
+     *
+     * @throws Refused where a number cannot be; the place is a pointer within the bundle
+     */
+    public Judged judge(List<Survey> surveys) {
+        Map<Pointer, Drive> drives = drives(surveys);
+        Map<Pointer, AssessedConveyor> conveyors = new LinkedHashMap<>();
         List<Assessed> assessed = new ArrayList<>();
         for (int i = 0; i < surveys.size(); i++) {
             Survey survey = surveys.get(i);
-            List<Survey> companions = drives.getOrDefault(drive(survey), List.of());
             try {
-                assessed.add(new Assessed(survey, assess(survey, companions)));
+                assessed.add(judge(survey, drives.get(drive(survey)), conveyors));
             } catch (Refused e) {
                 throw new Refused(inBundle(e.defect(), survey, Pointer.of("surveys").child(i)), e);
             }
         }
-        return assessed;
+        return new Judged(assessed, List.copyOf(conveyors.values()));
+    }
+
+    private Assessed judge(Survey survey, Drive drive, Map<Pointer, AssessedConveyor> conveyors) {
+        if (drive == null || !drive.holds(survey)) {
+            return new Assessed(survey, assess(survey, drive == null ? List.of() : drive.surveys()));
+        }
+        AssessedConveyor whole = conveyors.computeIfAbsent(drive(survey), key -> whole(drive));
+        Assessment one = whole.assessment().zones().get(drive.transfers().indexOf(survey.transfer()));
+        return new Assessed(survey, complete(one, survey));
     }
 
     /**
@@ -116,26 +158,48 @@ public final class Assessor {
      * @throws Refused where a reading cannot be; the place is a pointer within the survey
      */
     public Assessment assess(Survey survey, Collection<Survey> companions) {
-        List<LoadingZone> zones = new ArrayList<>();
-        zones.add(zone(survey));
-        Map<String, LoadingZone> others = new LinkedHashMap<>();
+        LoadingZone zone = zone(survey);
+        Drive drive = driveOf(survey);
         for (Survey companion : companions) {
             if (!companion.transfer().equals(survey.transfer())) {
-                sound(companion).ifPresent(zone -> others.put(companion.transfer(), zone));
+                sound(companion).ifPresent(other -> drive.put(companion, other));
             }
         }
-        zones.addAll(others.values());
-        int all = register.transfer(survey.transfer()).map(transfer -> register.zonesOf(transfer.conveyor()).size())
-                .orElse(zones.size());
-        try {
-            Assessment assessment = Engine.assessConveyor(zones, all - zones.size(), settings).get(0);
-            for (Assumption assumption : beforehand(survey)) {
-                assessment = assessment.with(assumption);
+        drive.put(survey, zone);
+        return complete(assess(drive).zones().get(drive.transfers().indexOf(survey.transfer())), survey);
+    }
+
+    /** The surveys of each drive that count: of each transfer point the last one that is sound and not superseded. */
+    private Map<Pointer, Drive> drives(List<Survey> surveys) {
+        Set<UUID> superseded = Survey.superseded(surveys);
+        Map<Pointer, Drive> drives = new LinkedHashMap<>();
+        for (Survey survey : surveys) {
+            if (!superseded.contains(survey.id())) {
+                sound(survey).ifPresent(zone -> drives.computeIfAbsent(drive(survey), key -> driveOf(survey))
+                        .put(survey, zone));
             }
-            return assessment;
+        }
+        return drives;
+    }
+
+    private AssessedConveyor whole(Drive drive) {
+        return new AssessedConveyor(drive.round(), drive.conveyor(), drive.surveys(), assess(drive));
+    }
+
+    private ConveyorAssessment assess(Drive drive) {
+        try {
+            return Engine.assessConveyor(drive.zones(), drive.unsurveyed(), settings);
         } catch (ImpossibleReading e) {
             throw refused(e);
         }
+    }
+
+    private Assessment complete(Assessment assessment, Survey survey) {
+        Assessment complete = assessment;
+        for (Assumption assumption : beforehand(survey)) {
+            complete = complete.with(assumption);
+        }
+        return complete;
     }
 
     /** What was taken for granted before the engine saw the zone. */
@@ -164,8 +228,16 @@ public final class Assessor {
     }
 
     private Pointer drive(Survey survey) {
-        return Pointer.of(survey.round().orElse(""),
-                register.transfer(survey.transfer()).map(Register.Transfer::conveyor).orElse(""));
+        return Pointer.of(survey.round().orElse(""), conveyor(survey));
+    }
+
+    private Drive driveOf(Survey survey) {
+        String conveyor = conveyor(survey);
+        return new Drive(survey.round().orElse(""), conveyor, transfers.getOrDefault(conveyor, List.of()));
+    }
+
+    private String conveyor(Survey survey) {
+        return register.transfer(survey.transfer()).map(Register.Transfer::conveyor).orElse("");
     }
 
     /** What is registered stands with the plant, not with the survey. */

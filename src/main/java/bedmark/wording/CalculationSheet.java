@@ -236,8 +236,7 @@ public final class CalculationSheet {
         }
         assessment.levelAtDesignFeed().ifPresent(level -> lines.item(
                 wording.text("verdict.at-design-feed", telling.level(level))));
-        assessment.repeat().ifPresent(place -> lines.item(wording.text("verdict.repeat",
-                wording.reading(place, form))));
+        telling.tell(assessment).repeat().ifPresent(lines::item);
     }
 
     private static boolean hasFormula(Rule rule) {

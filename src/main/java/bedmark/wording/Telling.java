@@ -7,12 +7,14 @@ import bedmark.engine.verdict.Component;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Remedy;
+import bedmark.engine.verdict.Repeat;
 import bedmark.engine.verdict.Rule;
 import bedmark.form.FieldForm;
 import bedmark.quantity.Dimension;
 import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
+import bedmark.survey.Readings;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
@@ -50,7 +52,20 @@ public final class Telling {
                 : Optional.of(atDesign(assessment));
         return new Told(sentence(assessment, leading), leading.flatMap(finding -> sure(assessment, finding)),
                 atDesign, figures(assessment), action(assessment, leading),
-                assessment.repeat().map(name -> wording.text("verdict.repeat", wording.reading(name, form))));
+                assessment.repeat().map(this::repeat));
+    }
+
+    /** The reading to take again, and within how much (k = 2) it would settle the verdict. */
+    private String repeat(Repeat repeat) {
+        String reading = wording.reading(repeat.reading(), form);
+        Optional<Dimension> dimension = Readings.dimension(repeat.reading());
+        if (repeat.standardUncertainty().isEmpty() || dimension.isEmpty()) {
+            return wording.text("verdict.repeat", reading);
+        }
+        Unit unit = dimension.get() == Dimension.LENGTH ? wording.units().smallLength()
+                : wording.units().unit(dimension.get());
+        return wording.text("verdict.repeat-within", reading,
+                wording.computed(2 * repeat.standardUncertainty().getAsDouble(), unit));
     }
 
     /** The finding that makes the verdict: of the worst level, the one nearest to or farthest over its limit. */

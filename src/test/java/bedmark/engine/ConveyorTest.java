@@ -17,7 +17,7 @@ class ConveyorTest {
     @Test
     void zonesOfAConveyorAddUp() {
         double one = skirts(Engine.assess(ZONE, Settings.standard())).orElseThrow().observed();
-        List<Assessment> three = Engine.assessConveyor(Collections.nCopies(3, ZONE), 0, Settings.standard());
+        List<Assessment> three = Engine.assessConveyor(Collections.nCopies(3, ZONE), 0, Settings.standard()).zones();
         assertEquals(3, three.size());
         for (Assessment assessment : three) {
             assertEquals(3 * one, skirts(assessment).orElseThrow().observed(), 1e-12);
@@ -39,16 +39,16 @@ class ConveyorTest {
     void materialsWithDifferentFactorsErrApart() {
         LoadingZone one = Zones.exact(ZONE).with(Datum.SKIRT_FRICTION_FACTOR, 0.08, 0.02);
         LoadingZone other = Zones.exact(ZONE).with(Datum.SKIRT_FRICTION_FACTOR, 0.09, 0.02);
-        Assessment assessment = Engine.assessConveyor(List.of(one, other), 0, Zones.exactSettings()).get(0);
+        Assessment assessment = Engine.assessConveyor(List.of(one, other), 0, Zones.exactSettings()).zones().get(0);
         assertEquals(spread(one, 1) * Math.sqrt(2), skirts(assessment).orElseThrow().standardUncertainty(), 1e-12);
     }
 
     @Test
     void aSumThatLacksZonesShowsOnlyThatTheLimitIsPassed() {
-        Assessment alone = Engine.assessConveyor(List.of(ZONE), 2, Settings.standard()).get(0);
+        Assessment alone = Engine.assessConveyor(List.of(ZONE), 2, Settings.standard()).zones().get(0);
         assertEquals(Optional.empty(), skirts(alone));
         LoadingZone weak = ZONE.with(Datum.RATED_POWER, 5_000, 0);
-        Assessment passed = Engine.assessConveyor(List.of(weak), 2, Settings.standard()).get(0);
+        Assessment passed = Engine.assessConveyor(List.of(weak), 2, Settings.standard()).zones().get(0);
         assertEquals(Level.NEAR, skirts(passed).orElseThrow().level());
         assertTrue(passed.assumptions().contains(Assumption.of("conveyor-sum-lower-bound", "2")));
     }
@@ -57,7 +57,7 @@ class ConveyorTest {
     void aZoneWithoutPowerCountsAsLacking() {
         LoadingZone weak = ZONE.with(Datum.RATED_POWER, 5_000, 0);
         List<Assessment> both = Engine.assessConveyor(List.of(weak, weak.without(Datum.BELT_SPEED)), 0,
-                Settings.standard());
+                Settings.standard()).zones();
         for (Assessment assessment : both) {
             assertEquals(Level.NEAR, skirts(assessment).orElseThrow().level());
             assertTrue(assessment.assumptions().contains(Assumption.of("conveyor-sum-lower-bound", "1")));
@@ -68,7 +68,7 @@ class ConveyorTest {
     void atDesignFeedAZoneWithoutAScaleCountsAsItIsToday() {
         LoadingZone half = ZONE.with(Datum.DESIGN_THROUGHPUT, 400, 0);
         LoadingZone unweighed = half.without(Datum.THROUGHPUT);
-        List<Assessment> both = Engine.assessConveyor(List.of(half, unweighed), 0, Settings.standard());
+        List<Assessment> both = Engine.assessConveyor(List.of(half, unweighed), 0, Settings.standard()).zones();
         double alone = skirtsAtDesign(Engine.assess(half, Settings.standard()));
         double other = both.get(1).get(Result.DRIVE_SHARE).orElseThrow().value();
         assertEquals(alone + other, skirtsAtDesign(both.get(0)), 1e-12);
@@ -76,7 +76,7 @@ class ConveyorTest {
     }
 
     private static double spread(LoadingZone zone, int zones) {
-        return skirts(Engine.assessConveyor(Collections.nCopies(zones, zone), 0, Zones.exactSettings()).get(0))
+        return skirts(Engine.assessConveyor(Collections.nCopies(zones, zone), 0, Zones.exactSettings()).zones().get(0))
                 .orElseThrow().standardUncertainty();
     }
 

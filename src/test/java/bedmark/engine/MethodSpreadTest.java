@@ -126,9 +126,9 @@ class MethodSpreadTest {
     @Test
     void methodsErrInAllZonesOfAConveyorAlike() {
         double one = spreadOf(Engine.assess(ZONE, Settings.standard()));
-        List<Assessment> three = Engine.assessConveyor(List.of(ZONE, ZONE, ZONE), 0, Settings.standard());
+        List<Assessment> three = Engine.assessConveyor(List.of(ZONE, ZONE, ZONE), 0, Settings.standard()).zones();
         Settings off = Settings.standard().with(Conventions.standard().withSpread(false));
-        double readings = skirts(Engine.assessConveyor(List.of(ZONE, ZONE, ZONE), 0, off).get(0))
+        double readings = skirts(Engine.assessConveyor(List.of(ZONE, ZONE, ZONE), 0, off).zones().get(0))
                 .standardUncertainty();
         assertEquals(Math.hypot(readings, 3 * one), skirts(three.get(0)).standardUncertainty(), 1e-12);
     }

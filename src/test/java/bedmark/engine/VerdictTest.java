@@ -48,7 +48,7 @@ class VerdictTest {
                 .withStations(List.of()).withStation(3, 0.40, DepthMethod.AT_BOARD, 0.02);
         Assessment assessment = Engine.assess(zone, Settings.standard());
         assertEquals(Level.UNDECIDED, assessment.level());
-        assertEquals(Optional.of("/readings/bedDepths/0/depth"), assessment.repeat());
+        assertEquals("/readings/bedDepths/0/depth", assessment.repeat().orElseThrow().reading());
         assertEquals(Optional.empty(), Engine.assess(HEALTHY, Settings.standard()).repeat());
     }
 

@@ -115,8 +115,9 @@ class WorkingTest {
                     same(estimate, working.stepOf("methods." + method.code()).orElseThrow()));
             for (Finding finding : assessment.findings()) {
                 if (finding.rule() != Rule.SKIRTS_OVER_BUDGET) {
-                    same(new Estimate(finding.observed(), finding.standardUncertainty()),
-                            working.stepOf(finding.code()).orElseThrow());
+                    // Its uncertainty may be drawn, or widened by what no formula says; the number is the same.
+                    assertClose(finding.observed(), working.stepOf(finding.code()).orElseThrow().value(), 0,
+                            finding.code());
                 }
             }
         });

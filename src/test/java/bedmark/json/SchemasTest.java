@@ -60,7 +60,8 @@ class SchemasTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"bundle", "assessment", "field-form"})
+    @ValueSource(strings = {"bundle", "assessment", "field-form", "reference-materials", "reference-limits",
+        "reference-seal-rates", "reference-speed-classes", "reference-instruments"})
     void schemasAreOfTheNamedDraftAndLeaveRoomForUnknownKeys(String name) {
         assertEquals("https://json-schema.org/draft/2020-12/schema", schema(name).text("$schema").orElseThrow());
         requireRoom(schema(name));

@@ -28,6 +28,25 @@ public final class NormalDistribution {
         return beyond(limit - estimate.value(), estimate.standardUncertainty());
     }
 
+    /**
+     * How many standard deviations from the middle a probability lies.
+     *
+     * @param probability of lying under it; from 0.5 up, and 1 gives what a double can no longer tell from certainty
+     */
+    public static double quantile(double probability) {
+        double low = 0;
+        double high = CERTAIN;
+        while (high - low > 1e-12) {
+            double middle = (low + high) / 2;
+            if (beyond(middle, 1) < probability) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        return high;
+    }
+
     private static double beyond(double excess, double uncertainty) {
         double z = excess / uncertainty;
         if (uncertainty == 0 || Math.abs(z) > CERTAIN) {

@@ -15,11 +15,12 @@ import java.util.OptionalDouble;
  * @param probabilityOverloaded that it lies beyond {@code overloaded}
  * @param source                mark of the source of the limits
  * @param assumption            whether the limits are an assumption
+ * @param drawn                 whether the probabilities were found by drawing (JCGM 101) rather than by the first order
  * @param leadingReading        the reading of this walk that brings the greatest share of the observed's variance
  */
 public record Finding(Rule rule, Level level, double observed, double standardUncertainty, OptionalDouble near,
         OptionalDouble overloaded, OptionalDouble probabilityNear, OptionalDouble probabilityOverloaded,
-        String source, boolean assumption, Optional<String> leadingReading) {
+        String source, boolean assumption, boolean drawn, Optional<String> leadingReading) {
 
     public String code() {
         return rule.code();

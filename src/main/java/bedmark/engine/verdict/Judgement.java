@@ -7,6 +7,8 @@ import java.util.OptionalDouble;
 
 /** Judges what was observed by the limits of its rule. */
 public final class Judgement {
+    private static final double BY_THE_THRESHOLD = 0.1;
+
     private Judgement() {
     }
 
@@ -24,7 +26,25 @@ public final class Judgement {
         OptionalDouble overOverloaded = probability(rule.sense(), observed, limit.overloaded());
         return new Finding(rule, level(overNear, overOverloaded, certainty), observed.value(),
                 observed.standardUncertainty(), limit.near(), limit.overloaded(), overNear, overOverloaded,
-                limit.source(), limit.assumption(), leading);
+                limit.source(), limit.assumption(), false, leading);
+    }
+
+    /** The same finding by what came of drawing its readings. */
+    public static Finding drawn(Finding finding, Chance chance, Certainty certainty) {
+        return new Finding(finding.rule(), level(chance.near(), chance.overloaded(), certainty), finding.observed(),
+                chance.standardDeviation(), finding.near(), finding.overloaded(), chance.near(), chance.overloaded(),
+                finding.source(), finding.assumption(), true, finding.leadingReading());
+    }
+
+    /**
+     * Whether a finding lies so near to where its level changes that how its number is distributed may decide: the
+     * probability of overload about the band of the undecided, or that of the warning about its own threshold.
+     */
+    public static boolean isDoubtful(Finding finding, Certainty certainty) {
+        double over = finding.probabilityOverloaded().orElse(0);
+        double near = finding.probabilityNear().orElse(0);
+        return over > certainty.undecided() / 2 && over < (1 + certainty.overloaded()) / 2
+                || Math.abs(near - certainty.near()) < BY_THE_THRESHOLD;
     }
 
     /** How the observed value stands, taken as certain: overloaded or near beyond the limit of that name. */

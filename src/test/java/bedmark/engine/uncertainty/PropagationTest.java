@@ -110,6 +110,14 @@ class PropagationTest {
     }
 
     @Test
+    void theQuantileIsTheInverse() {
+        assertEquals(0, NormalDistribution.quantile(0.5), 1e-11);
+        assertEquals(1.2815515655446004, NormalDistribution.quantile(0.9), 1e-11);
+        assertEquals(1.959963984540054, NormalDistribution.quantile(0.975), 1e-11);
+        assertEquals(8.3, NormalDistribution.quantile(1), 0.15);
+    }
+
+    @Test
     void aCertainValueOnItsLimitIsNeitherOverNorUnder() {
         assertEquals(0, NormalDistribution.over(1, new Estimate(1, 0)));
         assertEquals(0, NormalDistribution.under(1, new Estimate(1, 0)));

@@ -1,0 +1,147 @@
+package bedmark.engine;
+
+import bedmark.engine.uncertainty.Estimate;
+import bedmark.engine.uncertainty.Uncertain;
+import bedmark.engine.verdict.Component;
+import bedmark.engine.verdict.Rule;
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.EnumSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalInt;
+import java.util.Set;
+import java.util.function.Function;
+
+/** The assessment of one conveyor in the making: its zones are computed first, and judged once their sum is known. */
+final class ConveyorAppraisal {
+    /** Any number would do; it is the same everywhere, so that a verdict is. */
+    private static final long SEED = 20_260_101;
+    /** What a zone's own depths decide. */
+    private static final Set<Rule> OF_DEPTHS = EnumSet.of(Rule.BED_OVER_BOARD, Rule.BED_OVER_DESIGN);
+    private static final Set<Rule> OF_ALL_ZONES = EnumSet.of(Rule.SKIRTS_OVER_BUDGET);
+
+    private final List<LoadingZone> zones;
+    private final int unsurveyed;
+    private final Settings settings;
+    private final List<Appraisal> appraisals = new ArrayList<>();
+    private final Optional<ConveyorLoad> today;
+    private final Optional<ConveyorLoad> atDesign;
+
+    ConveyorAppraisal(List<LoadingZone> zones, int unsurveyed, Settings settings) {
+        this.zones = zones;
+        this.unsurveyed = unsurveyed;
+        this.settings = settings;
+        List<FeedFacts> feedsToday = new ArrayList<>(zones.size());
+        List<FeedFacts> feedsAtDesign = new ArrayList<>(zones.size());
+        for (LoadingZone zone : zones) {
+            Appraisal appraisal = new Appraisal(zone, settings);
+            appraisals.add(appraisal);
+            feedsToday.add(appraisal.today());
+            feedsAtDesign.add(appraisal.atDesign());
+        }
+        today = ConveyorLoad.of(feedsToday, unsurveyed);
+        atDesign = ConveyorLoad.of(feedsAtDesign, unsurveyed);
+    }
+
+    ConveyorAssessment assess() {
+        List<Findings.AtFeeds> findings = new ArrayList<>(zones.size());
+        for (Appraisal appraisal : appraisals) {
+            findings.add(appraisal.judge(today, atDesign));
+        }
+        if (settings.conventions().trials() > 0) {
+            drawDepths(findings);
+            drawSum(findings);
+        }
+        List<Assessment> assessments = new ArrayList<>(zones.size());
+        for (int i = 0; i < zones.size(); i++) {
+            assessments.add(appraisals.get(i).assessment(findings.get(i), today));
+        }
+        return new ConveyorAssessment(assessments, today.map(ConveyorLoad::lacking).orElse(unsurveyed + zones.size()),
+                sums(), leadingZone(), leading(assessments));
+    }
+
+    /** Each zone by itself, so that its verdict does not hang on which others were surveyed with it. */
+    private void drawDepths(List<Findings.AtFeeds> findings) {
+        for (int i = 0; i < zones.size(); i++) {
+            if (findings.get(i).isDoubtful(OF_DEPTHS) && appraisals.get(i).isCoarse()) {
+                findings.get(i).judge(OF_DEPTHS, trials(zones.subList(i, i + 1), OF_DEPTHS).get(0));
+            }
+        }
+    }
+
+    private void drawSum(List<Findings.AtFeeds> findings) {
+        boolean doubtful = false;
+        for (Findings.AtFeeds zone : findings) {
+            doubtful |= zone.isDoubtful(OF_ALL_ZONES);
+        }
+        if (doubtful && appraisals.stream().anyMatch(Appraisal::isCoarse)) {
+            List<MonteCarlo> drawn = trials(zones, OF_ALL_ZONES);
+            for (int i = 0; i < zones.size(); i++) {
+                findings.get(i).judge(OF_ALL_ZONES, drawn.get(i));
+            }
+        }
+    }
+
+    private List<MonteCarlo> trials(List<LoadingZone> drawn, Set<Rule> rules) {
+        return new Trials(drawn, settings, settings.conventions().trials(), rules, false).run(SEED);
+    }
+
+    private Map<Result, Estimate> sums() {
+        Map<Result, Estimate> sums = new EnumMap<>(Result.class);
+        sum(FeedFacts::materialDrag).ifPresent(sum -> sums.put(Result.MATERIAL_DRAG, sum));
+        sum(feed -> feed.zone().sealDrag()).ifPresent(sum -> sums.put(Result.SEAL_DRAG, sum));
+        sum(FeedFacts::skirtDrag).ifPresent(sum -> sums.put(Result.SKIRT_DRAG, sum));
+        sum(FeedFacts::loadingForce).ifPresent(sum -> sums.put(Result.LOADING_FORCE, sum));
+        sum(FeedFacts::skirtPower).ifPresent(sum -> sums.put(Result.SKIRT_POWER, sum));
+        sum(FeedFacts::drivePower).ifPresent(sum -> sums.put(Result.DRIVE_POWER, sum));
+        sum(FeedFacts::driveShare).ifPresent(sum -> sums.put(Result.DRIVE_SHARE, sum));
+        sum(FeedFacts::energy).ifPresent(sum -> sums.put(Result.ENERGY, sum));
+        return sums;
+    }
+
+    /** Nothing where one of the zones does not know its part. */
+    private Optional<Estimate> sum(Function<FeedFacts, Deduced<Uncertain>> part) {
+        List<Sum.Term> terms = new ArrayList<>(zones.size());
+        for (Appraisal appraisal : appraisals) {
+            Deduced<Uncertain> number = part.apply(appraisal.today());
+            if (!number.isKnown()) {
+                return Optional.empty();
+            }
+            terms.add(new Sum.Term(appraisal.today().zone().sources().tape(), number.get()));
+        }
+        return terms.isEmpty() ? Optional.empty() : Optional.of(Sum.of(terms));
+    }
+
+    /** The zone whose skirts take most power. */
+    private OptionalInt leadingZone() {
+        int leading = -1;
+        double most = Double.NEGATIVE_INFINITY;
+        for (int i = 0; i < zones.size(); i++) {
+            Deduced<Uncertain> power = appraisals.get(i).today().skirtPower();
+            if (power.isKnown() && power.get().value() > most) {
+                most = power.get().value();
+                leading = i;
+            }
+        }
+        return leading < 0 ? OptionalInt.empty() : OptionalInt.of(leading);
+    }
+
+    /** The greatest force of all zones together, where bed and seals of some are known. */
+    private static Optional<Component> leading(List<Assessment> zones) {
+        Map<Component, Double> forces = new EnumMap<>(Component.class);
+        for (Assessment zone : zones) {
+            if (zone.get(Result.SKIRT_DRAG).isPresent()) {
+                add(forces, Component.BED, zone.get(Result.MATERIAL_DRAG));
+                add(forces, Component.SEAL, zone.get(Result.SEAL_DRAG));
+                add(forces, Component.LOADING, zone.get(Result.LOADING_FORCE));
+            }
+        }
+        return forces.entrySet().stream().max(Map.Entry.comparingByValue()).map(Map.Entry::getKey);
+    }
+
+    private static void add(Map<Component, Double> forces, Component component, Optional<Estimate> force) {
+        force.ifPresent(known -> forces.merge(component, known.value(), Double::sum));
+    }
+}

@@ -1,0 +1,33 @@
+package bedmark.engine.verdict;
+
+import bedmark.engine.uncertainty.Distribution;
+import java.util.OptionalDouble;
+
+/**
+ * How often a rule was broken when its readings were drawn many times (JCGM 101:2008).
+ *
+ * @param near              share of the trials beyond the limit of warning, where there is one
+ * @param overloaded        share of the trials beyond the limit of overload, where there is one
+ * @param standardDeviation of what the rule observes, in its unit
+ */
+public record Chance(OptionalDouble near, OptionalDouble overloaded, double standardDeviation) {
+
+    /** The chance from what was observed in every trial. */
+    public static Chance of(Rule rule, double[] observed, Limit limit) {
+        return new Chance(share(rule, observed, limit.near()), share(rule, observed, limit.overloaded()),
+                Distribution.of(observed).standardDeviation());
+    }
+
+    private static OptionalDouble share(Rule rule, double[] observed, OptionalDouble limit) {
+        if (limit.isEmpty()) {
+            return limit;
+        }
+        int beyond = 0;
+        for (double value : observed) {
+            if (rule.sense() == Sense.OVER ? value > limit.getAsDouble() : value < limit.getAsDouble()) {
+                beyond++;
+            }
+        }
+        return OptionalDouble.of((double) beyond / observed.length);
+    }
+}

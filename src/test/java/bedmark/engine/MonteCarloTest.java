@@ -1,0 +1,235 @@
+package bedmark.engine;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertNotEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.engine.bed.DepthMethod;
+import bedmark.engine.drag.DragMethod;
+import bedmark.engine.uncertainty.Distribution;
+import bedmark.engine.uncertainty.Estimate;
+import bedmark.engine.uncertainty.ImpossibleReading;
+import bedmark.engine.verdict.Chance;
+import bedmark.engine.verdict.Finding;
+import bedmark.engine.verdict.Level;
+import bedmark.engine.verdict.Rule;
+import java.util.Collections;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Random;
+import org.junit.jupiter.api.Test;
+
+class MonteCarloTest {
+    private static final int TRIALS = 6_000;
+    private static final long SEED = 7;
+    private static final LoadingZone ZONE = Zones.healthy();
+
+    @Test
+    void firstOrderAndDrawingAgreeWhereTheReadingsAreFine() {
+        LoadingZone fine = ZONE.withStations(List.of()).withStation(1, 0.30, DepthMethod.AT_BOARD, 0.004)
+                .withStation(3, 0.25, DepthMethod.FROM_BOARD_TOP, 0.004)
+                .withStation(5, 0.20, DepthMethod.AT_BOARD, 0.004);
+        Assessment firstOrder = Engine.assess(fine, Settings.standard());
+        MonteCarlo drawn = Engine.monteCarlo(List.of(fine), Settings.standard(), SEED, 20_000).get(0);
+        assertEquals(firstOrder.results().keySet(), drawn.results().keySet());
+        for (Result result : List.of(Result.SKIRT_DRAG, Result.SKIRT_POWER, Result.DRIVE_POWER, Result.DRIVE_SHARE,
+                Result.ENERGY, Result.MATERIAL_DRAG, Result.SEAL_DRAG, Result.IMPLIED_THROUGHPUT, Result.BED_AREA,
+                Result.MEAN_SQUARE_DEPTH, Result.MEAN_DEPTH, Result.LOADING_FORCE, Result.FILL,
+                Result.RUNNING_SHARE, Result.DESIGN_DEPTH)) {
+            agree(result.key(), firstOrder.get(result).orElseThrow(), drawn.results().get(result));
+        }
+        for (DragMethod method : drawn.methods().keySet()) {
+            if (method != DragMethod.ISO_5048) {
+                agree(method.code(), firstOrder.methods().get(method), drawn.methods().get(method));
+            }
+        }
+        assertTrue(drawn.methods().containsKey(DragMethod.ISO_5048));
+    }
+
+    private static void agree(String what, Estimate firstOrder, Distribution drawn) {
+        double u = firstOrder.standardUncertainty();
+        assertEquals(firstOrder.value(), drawn.mean(), Math.max(0.02 * Math.abs(firstOrder.value()), 0.02 * u), what);
+        assertEquals(u, drawn.standardDeviation(), 0.02 * u, what);
+        assertEquals(firstOrder.value() - 1.96 * u, drawn.low(), 0.4 * u, what);
+        assertEquals(firstOrder.value() + 1.96 * u, drawn.high(), 0.4 * u, what);
+    }
+
+    /** The mean of a square is that of the mean and the variance: drawing finds more drag, and a tail to the right. */
+    @Test
+    void whereTheSquareMattersDrawingFindsMore() {
+        for (double spread : new double[]{0.02, 0.03, 0.04}) {
+            LoadingZone coarse = Zones.exact(ZONE).withStations(List.of())
+                    .withStation(3, 0.15, DepthMethod.AT_BOARD, spread);
+            Estimate firstOrder = Engine.assess(coarse, Zones.exactSettings()).get(Result.MEAN_SQUARE_DEPTH)
+                    .orElseThrow();
+            Distribution drawn = Engine.monteCarlo(List.of(coarse), Zones.exactSettings(), SEED, 50_000).get(0)
+                    .results().get(Result.MEAN_SQUARE_DEPTH);
+            double exact = Math.sqrt(4 * 0.0225 * spread * spread + 2 * Math.pow(spread, 4));
+            double chance = 4 * exact / Math.sqrt(50_000);
+            assertEquals(firstOrder.value() + spread * spread, drawn.mean(), chance);
+            assertTrue(chance < 0.5 * spread * spread && drawn.mean() > firstOrder.value());
+            assertEquals(exact, drawn.standardDeviation(), 0.02 * exact);
+            assertTrue(drawn.standardDeviation() > firstOrder.standardUncertainty());
+            assertTrue(drawn.high() - firstOrder.value() > firstOrder.value() - drawn.low(), "skewed to the right");
+        }
+    }
+
+    @Test
+    void theSameSeedDrawsTheSame() {
+        List<MonteCarlo> once = Engine.monteCarlo(List.of(ZONE, ZONE), Settings.standard(), 3, 200);
+        assertEquals(once, Engine.monteCarlo(List.of(ZONE, ZONE), Settings.standard(), 3, 200));
+        assertNotEquals(once, Engine.monteCarlo(List.of(ZONE, ZONE), Settings.standard(), 4, 200));
+        assertEquals(200, once.get(0).trials());
+    }
+
+    /** Fixed for good: a verdict that rests on drawing is the same on every device and in every later version. */
+    @Test
+    void theNumbersOfASeedAreLaidDown() {
+        Distribution drawn = Engine.monteCarlo(List.of(ZONE), Settings.standard(), 1, 10).get(0).results()
+                .get(Result.SKIRT_DRAG);
+        assertEquals(701.6825381770273, drawn.mean(), 1e-9);
+        assertEquals(190.18774528741977, drawn.standardDeviation(), 1e-9);
+    }
+
+    @Test
+    void whereNumbersAreLinearTheChanceIsThatOfTheNormalDistribution() {
+        LoadingZone zone = ZONE.withStations(List.of()).withStation(3, 0.395, DepthMethod.AT_BOARD, 0.005);
+        Chance chance = drawn(zone).chances().get(Rule.BED_OVER_BOARD);
+        Finding finding = finding(Engine.assess(zone, Settings.standard()), Rule.BED_OVER_BOARD);
+        assertEquals(finding.probabilityOverloaded().orElseThrow(), chance.overloaded().orElseThrow(), 0.02);
+        assertEquals(finding.probabilityNear().orElseThrow(), chance.near().orElseThrow(), 0.02);
+        assertEquals(finding.standardUncertainty(), chance.standardDeviation(), 0.02 * finding.standardUncertainty());
+        assertFalse(drawn(zone).chances().containsKey(Rule.BED_NOT_SETTLED), "one station tells no change");
+        Chance slow = drawn(zone.with(Datum.THROUGHPUT, 470, 30)).chances().get(Rule.BED_BEHIND_BELT);
+        Finding behind = finding(Engine.assess(zone.with(Datum.THROUGHPUT, 470, 30), Settings.standard()),
+                Rule.BED_BEHIND_BELT);
+        assertEquals(behind.probabilityNear().orElseThrow(), slow.near().orElseThrow(), 0.02);
+        assertEquals(OptionalDouble.empty(), slow.overloaded());
+    }
+
+    /** Where several stations are as deep, any of them may be over the board; the first order sees one alone. */
+    @Test
+    void ofSeveralDepthsTheDeepestIsDeeperThanEach() {
+        LoadingZone level = ZONE.withStations(List.of());
+        for (int i = 0; i < 4; i++) {
+            level = level.withStation(0.5 + i, 0.37, DepthMethod.AT_BOARD, 0.02);
+        }
+        double drawn = drawn(level).chances().get(Rule.BED_OVER_BOARD).overloaded().orElseThrow();
+        double one = finding(Engine.assess(level, Settings.standard()), Rule.BED_OVER_BOARD).probabilityOverloaded()
+                .orElseThrow();
+        assertTrue(drawn > 2 * one && drawn < 4 * one, drawn + " for " + one);
+    }
+
+    @Test
+    void whatTheZonesShareIsDrawnOnceForAll() {
+        LoadingZone shared = Zones.exact(ZONE).with(Datum.DRIVE_EFFICIENCY, 0.9, 0.02)
+                .with(Datum.BELT_SPEED, 2, 0.02);
+        List<LoadingZone> four = Collections.nCopies(4, shared);
+        double drawn = Engine.monteCarlo(four, Zones.exactSettings(), SEED, TRIALS).get(0).chances()
+                .get(Rule.SKIRTS_OVER_BUDGET).standardDeviation();
+        double firstOrder = finding(Engine.assessConveyor(four, 0, Zones.exactSettings()).zones().get(0),
+                Rule.SKIRTS_OVER_BUDGET).standardUncertainty();
+        assertEquals(firstOrder, drawn, 0.02 * firstOrder);
+    }
+
+    @Test
+    void theDisagreementOfTheMethodsIsDrawnEvenlyInAllZonesAlike() {
+        Settings exact = Zones.exactSettings().with(Zones.exactSettings().conventions().withSpread(true));
+        List<LoadingZone> three = Collections.nCopies(3, Zones.exact(ZONE));
+        MonteCarlo drawn = Engine.monteCarlo(three, exact, SEED, TRIALS).get(0);
+        double spread = finding(Engine.assessConveyor(three, 0, exact).zones().get(0), Rule.SKIRTS_OVER_BUDGET)
+                .standardUncertainty();
+        assertEquals(spread, drawn.chances().get(Rule.SKIRTS_OVER_BUDGET).standardDeviation(), 0.02 * spread);
+        assertEquals(0, drawn.results().get(Result.DRIVE_SHARE).standardDeviation(), 1e-12);
+        LoadingZone more = Zones.exact(ZONE).with(Datum.DESIGN_THROUGHPUT, 400, 0);
+        Finding drive = Engine.assess(more, exact).findingsAtDesign().stream()
+                .filter(found -> found.rule() == Rule.DRIVE_NEAR_RATING).findFirst().orElseThrow();
+        assertTrue(drive.standardUncertainty() > 0);
+        assertEquals(drive.standardUncertainty(), Engine.monteCarlo(List.of(more), exact, SEED, TRIALS).get(0)
+                .chancesAtDesign().get(Rule.DRIVE_NEAR_RATING).standardDeviation(),
+                0.02 * drive.standardUncertainty());
+    }
+
+    @Test
+    void noDepthIsDrawnBelowNothingAndNoNumberIsLost() {
+        Random random = new Random(5);
+        for (int i = 0; i < 100; i++) {
+            LoadingZone zone = Zones.random(random);
+            MonteCarlo drawn = Engine.monteCarlo(List.of(zone), Settings.standard(), i, 40).get(0);
+            drawn.results().values().forEach(one -> assertTrue(Double.isFinite(one.mean())
+                    && Double.isFinite(one.standardDeviation()) && one.low() <= one.high()));
+            Optional.ofNullable(drawn.results().get(Result.DEEPEST_DEPTH))
+                    .ifPresent(deepest -> assertTrue(deepest.low() >= 0));
+        }
+        LoadingZone thin = ZONE.withStations(List.of()).withStation(3, 0.005, DepthMethod.AT_BOARD, 0.02);
+        assertTrue(drawn(thin).results().get(Result.MEAN_DEPTH).low() > 0);
+    }
+
+    @Test
+    void anAssessmentDrawsWhereACoarseDepthDecides() {
+        LoadingZone coarse = ZONE.withStations(List.of()).withStation(2, 0.19, DepthMethod.AT_BOARD, 0.025)
+                .withStation(4, 0.2, DepthMethod.AT_BOARD, 0.025);
+        Assessment assessment = Engine.assess(coarse, Settings.standard());
+        Finding drawn = finding(assessment, Rule.BED_OVER_DESIGN);
+        assertTrue(drawn.drawn());
+        assertTrue(assessment.assumptions().contains(Assumption.of("monte-carlo-used", "2000")));
+        Chance chance = Engine.monteCarlo(List.of(coarse), Settings.standard(), 11, TRIALS).get(0).chances()
+                .get(Rule.BED_OVER_DESIGN);
+        assertEquals(chance.overloaded().orElseThrow(), drawn.probabilityOverloaded().orElseThrow(), 0.04);
+        assertEquals(chance.near().orElseThrow(), drawn.probabilityNear().orElseThrow(), 0.04);
+        assertEquals(Level.UNDECIDED, drawn.level());
+        assertFalse(finding(assessment, Rule.ZONE_TOO_SHORT).drawn());
+        assertTrue(assessment.findingsAtDesign().stream().anyMatch(Finding::drawn), "at design feed too");
+    }
+
+    @Test
+    void anAssessmentDoesNotDrawWhereNothingHangsOnIt() {
+        LoadingZone coarseButFar = ZONE.withStations(List.of()).withStation(3, 0.05, DepthMethod.AT_BOARD, 0.01);
+        LoadingZone doubtfulButFine = ZONE.withStations(List.of()).withStation(3, 0.399, DepthMethod.AT_BOARD, 0.005);
+        for (LoadingZone zone : List.of(ZONE, coarseButFar, doubtfulButFine)) {
+            assertTrue(Engine.assess(zone, Settings.standard()).findings().stream().noneMatch(Finding::drawn));
+        }
+        LoadingZone coarse = ZONE.withStations(List.of()).withStation(3, 0.2, DepthMethod.AT_BOARD, 0.03);
+        assertTrue(finding(Engine.assess(coarse, Settings.standard()), Rule.BED_OVER_DESIGN).drawn());
+        Settings never = Settings.standard().with(Conventions.standard().withTrials(0));
+        assertFalse(finding(Engine.assess(coarse, never), Rule.BED_OVER_DESIGN).drawn());
+    }
+
+    @Test
+    void theSumOfAConveyorIsDrawnTheSameInAllItsZones() {
+        LoadingZone coarse = ZONE.withStations(List.of()).withStation(3, 0.12, DepthMethod.AT_BOARD, 0.03)
+                .with(Datum.SKIRT_POWER_BUDGET, 0.075, 0);
+        List<Assessment> zones = Engine.assessConveyor(List.of(coarse, ZONE, coarse), 0, Settings.standard()).zones();
+        Finding first = finding(zones.get(0), Rule.SKIRTS_OVER_BUDGET);
+        assertTrue(first.drawn());
+        assertEquals(first.probabilityOverloaded(), finding(zones.get(2), Rule.SKIRTS_OVER_BUDGET)
+                .probabilityOverloaded());
+        assertTrue(finding(zones.get(1), Rule.SKIRTS_OVER_BUDGET).drawn());
+    }
+
+    @Test
+    void trialsThatCannotBeAreRefused() {
+        for (int trials : new int[]{0, -1, 1_000_001}) {
+            ImpossibleReading refusal = assertThrows(ImpossibleReading.class,
+                    () -> Engine.monteCarlo(List.of(ZONE), Settings.standard(), 1, trials));
+            assertEquals("trials-impossible", refusal.code());
+        }
+        assertThrows(ImpossibleReading.class, () -> Conventions.standard().withTrials(-1));
+        assertEquals("reading-negative", assertThrows(ImpossibleReading.class, () -> Engine.monteCarlo(
+                List.of(ZONE.with(Datum.BELT_SPEED, -1, 0)), Settings.standard(), 1, 1)).code());
+        assertEquals(Map.of(), Engine.monteCarlo(List.of(LoadingZone.UNKNOWN), Settings.standard(), 1, 1).get(0)
+                .results());
+    }
+
+    private static MonteCarlo drawn(LoadingZone zone) {
+        return Engine.monteCarlo(List.of(zone), Settings.standard(), SEED, TRIALS).get(0);
+    }
+
+    private static Finding finding(Assessment assessment, Rule rule) {
+        return assessment.findings().stream().filter(finding -> finding.rule() == rule).findFirst().orElseThrow();
+    }
+}

@@ -12,8 +12,8 @@ import bedmark.engine.uncertainty.Reading;
  * @param lengths   the conventions for the length of a zone
  * @param incline   whether the slope of the belt counts in the acceleration length; the standard's own form is level
  * @param spread    whether the disagreement of the methods counts in verdicts on power
- * @param trials    of the Monte Carlo method where a verdict rests on depths too uncertain for the first order; 0 for
- *                  never
+ * @param trials    of the Monte Carlo method where a verdict rests on depths too uncertain for the first order; 0, the
+ *                  default, for never: a tablet answers each key within a frame
  */
 public record Conventions(Reading beltGrip, Reading boardGrip, LengthConventions lengths, boolean incline,
         boolean spread, int trials) {
@@ -24,7 +24,7 @@ public record Conventions(Reading beltGrip, Reading boardGrip, LengthConventions
     private static final double GRIP_SPREAD = 0.1 / Math.sqrt(3);
     private static final Conventions STANDARD = new Conventions(
             new Reading("/plant/limits/beltGrip", 0.6, GRIP_SPREAD),
-            new Reading("/plant/limits/boardGrip", 0.6, GRIP_SPREAD), LengthConventions.ALL, true, true, 2_000);
+            new Reading("/plant/limits/boardGrip", 0.6, GRIP_SPREAD), LengthConventions.ALL, true, true, 0);
 
     /** @throws ImpossibleReading where a factor is not above 0 and up to 1, or the trials are not 0…1 000 000 */
     public Conventions {

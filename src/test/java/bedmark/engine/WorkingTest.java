@@ -31,7 +31,7 @@ import org.junit.jupiter.api.Test;
 
 /** The working that is shown is the working that was done. */
 class WorkingTest {
-    private static final int ZONES = 1_500;
+    private static final int ZONES = 150;
 
     private static void forEveryZone(BiConsumer<LoadingZone, Settings> test) {
         Random random = new Random(31);

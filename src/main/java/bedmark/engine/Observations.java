@@ -47,7 +47,8 @@ final class Observations {
             case DRIVE_NEAR_RATING -> feed == today ? runningShare() : runningShareAtLeast();
             case SKIRTS_OVER_BUDGET -> feed.driveShare();
             case BED_BEHIND_BELT, READINGS_DISAGREE -> today.bedSpeedRatio();
-            case ZONE_TOO_SHORT -> over(zone.length(), zone.settlingLength());
+            case ZONE_TOO_SHORT -> zone.settlingLength().value().filter(needed -> needed.value() <= 0).isPresent()
+                    ? Deduced.nothing() : over(zone.length(), zone.settlingLength());
             case BOARDS_TOO_WIDE -> over(zone.spacing(), widestSpacing());
             case EDGE_TOO_SMALL -> over(freeEdge(), leastEdge());
             case BOARD_TOO_LOW_FOR_LUMPS -> boardOverLumps();

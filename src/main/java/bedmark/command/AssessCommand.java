@@ -8,6 +8,7 @@ import bedmark.json.JsonWriter;
 import bedmark.quantity.UnitSystem;
 import bedmark.survey.Assessor;
 import bedmark.survey.Assessor.Assessed;
+import bedmark.survey.Assessor.AssessedConveyor;
 import bedmark.survey.Bundle;
 import bedmark.wording.Wording;
 import java.nio.charset.StandardCharsets;
@@ -53,8 +54,12 @@ final class AssessCommand implements Callable<Integer> {
         private boolean csv;
     }
 
-    /** The surveys of one bundle with their assessments. */
-    record Judged(Bundle bundle, List<Assessed> surveys) {
+    /** The surveys and conveyors of one bundle with their assessments. */
+    record Judged(Bundle bundle, List<Assessed> surveys, List<AssessedConveyor> conveyors) {
+        static Judged of(Bundle bundle) {
+            Assessor.Judged judged = new Assessor(bundle.register()).judge(bundle.surveys());
+            return new Judged(bundle, judged.surveys(), judged.conveyors());
+        }
     }
 
     AssessCommand(Surroundings surroundings) {
@@ -76,14 +81,14 @@ final class AssessCommand implements Callable<Integer> {
     private int assess(Path from, UnitSystem system) throws Exception {
         List<Judged> judged = new ArrayList<>();
         for (BundleSource.Named named : BundleSource.read(from)) {
-            judged.add(in(named.file(), () -> new Judged(named.bundle(),
-                    new Assessor(named.bundle().register()).assess(named.bundle().surveys()))));
+            judged.add(in(named.file(), () -> Judged.of(named.bundle())));
         }
         List<Assessed> all = judged.stream().flatMap(one -> one.surveys().stream()).toList();
         Wording wording = new Wording(surroundings.words(), system);
         String notice = surroundings.words().text("command.notice");
         if (output.json) {
-            byte[] json = JsonWriter.indented(AssessmentWriter.list(all, notice));
+            List<AssessedConveyor> conveyors = judged.stream().flatMap(one -> one.conveyors().stream()).toList();
+            byte[] json = JsonWriter.indented(AssessmentWriter.list(all, conveyors, notice));
             surroundings.out().print(new String(json, StandardCharsets.UTF_8));
         } else if (output.csv) {
             new AssessmentTable(wording).print(judged, notice, surroundings.out());

@@ -10,6 +10,7 @@ import bedmark.json.JsonWriter;
 import bedmark.json.ReferenceData;
 import bedmark.quantity.UnitSystem;
 import bedmark.survey.Assessor.Assessed;
+import bedmark.survey.Assessor.AssessedConveyor;
 import bedmark.survey.Assessor;
 import bedmark.survey.Bundle;
 import bedmark.survey.Register;
@@ -72,9 +73,11 @@ final class AssessCommand implements Callable<Integer> {
      * The surveys of one bundle with their assessments.
      *
      * @param assessor   who made them
+     * @param conveyors  their conveyors as a whole
      * @param superseded the surveys that a later revision in the bundle replaces; they are judged all the same
      */
-    record Judged(Bundle bundle, Assessor assessor, List<Assessed> surveys, Set<UUID> superseded) {
+    record Judged(Bundle bundle, Assessor assessor, List<Assessed> surveys,
+                  List<AssessedConveyor> conveyors, Set<UUID> superseded) {
     }
 
     AssessCommand(Surroundings surroundings) {
@@ -103,7 +106,8 @@ final class AssessCommand implements Callable<Integer> {
         Wording wording = new Wording(surroundings.words(), system);
         String notice = surroundings.words().text("command.notice");
         if (output.json) {
-            byte[] json = JsonWriter.indented(AssessmentWriter.list(all, notice));
+            List<AssessedConveyor> conveyors = judged.stream().flatMap(one -> one.conveyors().stream()).toList();
+            byte[] json = JsonWriter.indented(AssessmentWriter.list(all, conveyors, notice));
             surroundings.out().print(new String(json, StandardCharsets.UTF_8));
         } else if (output.csv) {
             new AssessmentTable(wording).print(judged, notice, surroundings.out());
@@ -123,7 +127,8 @@ final class AssessCommand implements Callable<Integer> {
         Assessor assessor = below(Pointer.of("plant"), () -> data
                 .map(own -> new Assessor(new Register(own.filled(bundle.register().document())), own.settings()))
                 .orElseGet(() -> new Assessor(bundle.register())));
-        return new Judged(bundle, assessor, assessor.assess(bundle.surveys()), Survey.superseded(bundle.surveys()));
+        Assessor.Judged judged = assessor.judge(bundle.surveys());
+        return new Judged(bundle, assessor, judged.surveys(), judged.conveyors(), Survey.superseded(bundle.surveys()));
     }
 
     private static int exitCode(List<Assessed> all) {

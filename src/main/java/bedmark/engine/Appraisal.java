@@ -7,11 +7,8 @@ import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.uncertainty.Share;
 import bedmark.engine.uncertainty.Tape;
 import bedmark.engine.uncertainty.Uncertain;
-import bedmark.engine.verdict.AllowedDepth;
 import bedmark.engine.verdict.Component;
-import bedmark.engine.verdict.Limit;
 import bedmark.engine.verdict.Remedy;
-import bedmark.engine.verdict.Rule;
 import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
@@ -42,6 +39,11 @@ final class Appraisal {
         return design.orElse(today);
     }
 
+    /** Whether it has a share of the drive, but none at design throughput. */
+    boolean standsAsToday() {
+        return design.isEmpty() && today.driveShare().isKnown();
+    }
+
     /** Whether some depth is so uncertain that its square is no longer near enough to a straight line. */
     boolean isCoarse() {
         return today.profile().isKnown() && Assumptions.isCoarse(points(today.profile().get()));
@@ -53,7 +55,8 @@ final class Appraisal {
         return new Findings.AtFeeds(findings, design.map(feed -> findings.atDesign(today, feed, loadAtDesign)));
     }
 
-    Assessment assessment(Findings.AtFeeds judged, Optional<ConveyorLoad> load) {
+    Assessment assessment(Findings.AtFeeds judged, Optional<ConveyorLoad> load,
+            Optional<ConveyorLoad> loadAtDesign) {
         Map<Result, Deduced<Uncertain>> results = Results.of(today);
         Map<DragMethod, Deduced<Uncertain>> methods = today.methods();
         Findings findings = judged.today();
@@ -63,13 +66,15 @@ final class Appraisal {
         numbers.addAll(methods.values());
         numbers.addAll(findings.numbers());
         List<DepthPoint> profile = today.profile().value().map(this::points).orElse(List.of());
-        List<Assumption> assumptions = new Assumptions(today, methods).all(profile, judged, load);
-        List<Remedy> remedies = new Remedies(zone, findings.all(), othersShare(load)).all();
+        List<Assumption> assumptions = new Assumptions(today, methods).all(profile, judged, load, loadAtDesign);
+        double othersShare = othersShare(load);
+        List<Remedy> remedies = new Remedies(zone, findings.all(), othersShare).all();
         return new Assessment(today.materialDrag().value().map(drag -> today.method()),
                 estimates(Result.class, results), estimates(DragMethod.class, methods), new Spread(today).of(methods),
-                energyKind(), profile, findings.level(!required.isEmpty()),
+                energyKind(), zone.settings().prices().currency(), profile, findings.level(!required.isEmpty()),
                 judged.atDesign().map(then -> then.level(!required.isEmpty())), findings.all(),
-                judged.atDesign().map(Findings::all).orElse(List.of()), allowedDepths(), remedies, assumptions,
+                judged.atDesign().map(Findings::all).orElse(List.of()), judged.refused(),
+                new AllowedDepths(today, othersShare).all(), remedies, assumptions,
                 requirements.all(required, numbers), required, zone.sidesWithoutSeals(),
                 today.skirtPower().value().map(tape::shares).orElse(List.<Share>of()), leading(), findings.repeat());
     }
@@ -95,19 +100,6 @@ final class Appraisal {
             points.add(new DepthPoint(profile.position(i).value(), tape.estimate(profile.depth(i))));
         }
         return points;
-    }
-
-    private List<AllowedDepth> allowedDepths() {
-        List<AllowedDepth> depths = new ArrayList<>();
-        allowed(Rule.BED_OVER_BOARD, zone.height()).ifPresent(depths::add);
-        allowed(Rule.BED_OVER_DESIGN, zone.referenceDepth()).ifPresent(depths::add);
-        return depths;
-    }
-
-    private Optional<AllowedDepth> allowed(Rule rule, Deduced<Uncertain> whole) {
-        Limit limit = zone.settings().limits().of(rule);
-        return whole.value().filter(depth -> limit.on()).map(depth -> new AllowedDepth(rule,
-                Findings.times(limit.near(), depth.value()), Findings.times(limit.overloaded(), depth.value())));
     }
 
     private Optional<Assessment.EnergyKind> energyKind() {

@@ -9,6 +9,7 @@ import bedmark.engine.verdict.AllowedDepth;
 import bedmark.engine.verdict.Component;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Level;
+import bedmark.engine.verdict.RefusedVerdict;
 import bedmark.engine.verdict.Remedy;
 import bedmark.engine.verdict.Repeat;
 import java.util.ArrayList;
@@ -43,9 +44,10 @@ import java.util.Optional;
  * @param repeat            the reading to take again first where the verdict is undecided
  */
 public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> results,
-        Map<DragMethod, Estimate> methods, Optional<MethodSpread> spread, Optional<EnergyKind> energyKind, List<DepthPoint> profile, Level level,
+        Map<DragMethod, Estimate> methods, Optional<MethodSpread> spread, Optional<EnergyKind> energyKind,
+        Optional<String> currency, List<DepthPoint> profile, Level level,
         Optional<Level> levelAtDesignFeed, List<Finding> findings, List<Finding> findingsAtDesign,
-        List<AllowedDepth> allowedDepths, List<Remedy> remedies, List<Assumption> assumptions, List<String> missing,
+        List<RefusedVerdict> refused, List<AllowedDepth> allowedDepths, List<Remedy> remedies, List<Assumption> assumptions, List<String> missing,
         List<String> missingRequired, List<Side> sidesWithoutSeals, List<Share> powerShares,
         Optional<Component> leading, Optional<Repeat> repeat) {
 
@@ -73,6 +75,7 @@ public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> resu
         profile = List.copyOf(profile);
         findings = List.copyOf(findings);
         findingsAtDesign = List.copyOf(findingsAtDesign);
+        refused = List.copyOf(refused);
         allowedDepths = List.copyOf(allowedDepths);
         remedies = List.copyOf(remedies);
         assumptions = List.copyOf(assumptions);
@@ -105,8 +108,8 @@ public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> resu
     public Assessment with(Assumption assumption) {
         List<Assumption> more = new ArrayList<>(assumptions);
         more.add(assumption);
-        return new Assessment(method, results, methods, spread, energyKind, profile, level, levelAtDesignFeed, findings,
-                findingsAtDesign, allowedDepths, remedies, more, missing, missingRequired, sidesWithoutSeals,
+        return new Assessment(method, results, methods, spread, energyKind, currency, profile, level, levelAtDesignFeed, findings,
+                findingsAtDesign, refused, allowedDepths, remedies, more, missing, missingRequired, sidesWithoutSeals,
                 powerShares, leading, repeat);
     }
 

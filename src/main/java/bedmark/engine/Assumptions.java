@@ -33,11 +33,13 @@ final class Assumptions {
     /**
      * All of them.
      *
-     * @param profile the depths of today
-     * @param judged  the rules
-     * @param load    the conveyor's
+     * @param profile      the depths of today
+     * @param judged       the rules
+     * @param load         the conveyor's today
+     * @param loadAtDesign the same at design throughput
      */
-    List<Assumption> all(List<DepthPoint> profile, Findings.AtFeeds judged, Optional<ConveyorLoad> load) {
+    List<Assumption> all(List<DepthPoint> profile, Findings.AtFeeds judged, Optional<ConveyorLoad> load,
+            Optional<ConveyorLoad> loadAtDesign) {
         Set<Assumption> all = new LinkedHashSet<>();
         geometry(all);
         speed(all);
@@ -46,6 +48,8 @@ final class Assumptions {
         seals(all);
         flow(all, judged.atDesign().isPresent());
         verdict(all, judged, load);
+        atDesign(all, judged, loadAtDesign);
+        outside(all);
         return new ArrayList<>(all);
     }
 
@@ -139,6 +143,29 @@ final class Assumptions {
         }
         if (load.isPresent() && load.get().lacking() > 0 && judged.today().has(Rule.SKIRTS_OVER_BUDGET)) {
             all.add(Assumption.of("conveyor-sum-lower-bound", Integer.toString(load.get().lacking())));
+        }
+    }
+
+    /** What the verdict at design feed leaves out, where it tells of the drive at all. */
+    private void atDesign(Set<Assumption> all, Findings.AtFeeds judged, Optional<ConveyorLoad> load) {
+        boolean drive = judged.atDesign().filter(design -> design.has(Rule.DRIVE_NEAR_RATING)).isPresent();
+        boolean skirts = judged.atDesign().filter(design -> design.has(Rule.SKIRTS_OVER_BUDGET)).isPresent();
+        if (drive && zone.number(Datum.DESIGN_THROUGHPUT).get().value()
+                > zone.number(Datum.THROUGHPUT).get().value()) {
+            all.add(Assumption.of("drive-lower-bound-at-design"));
+        }
+        if (skirts && load.isPresent() && load.get().asToday() > 0) {
+            all.add(Assumption.of("conveyor-sum-at-todays-feed", Integer.toString(load.get().asToday())));
+        }
+    }
+
+    /** What stands outside the methods altogether. */
+    private void outside(Set<Assumption> all) {
+        if (zone.zone().is(LoadingZone.Mark.BELT_FEEDER)) {
+            all.add(Assumption.of("hopper-load-outside"));
+        }
+        if (zone.zone().is(LoadingZone.Mark.FULLY_SKIRTED)) {
+            all.add(Assumption.of("no-open-belt"));
         }
     }
 

@@ -35,14 +35,16 @@ final class ConveyorAppraisal {
         this.settings = settings;
         List<FeedFacts> feedsToday = new ArrayList<>(zones.size());
         List<FeedFacts> feedsAtDesign = new ArrayList<>(zones.size());
+        int asToday = 0;
         for (LoadingZone zone : zones) {
             Appraisal appraisal = new Appraisal(zone, settings);
             appraisals.add(appraisal);
             feedsToday.add(appraisal.today());
             feedsAtDesign.add(appraisal.atDesign());
+            asToday += appraisal.standsAsToday() ? 1 : 0;
         }
-        today = ConveyorLoad.of(feedsToday, unsurveyed);
-        atDesign = ConveyorLoad.of(feedsAtDesign, unsurveyed);
+        today = ConveyorLoad.of(feedsToday, unsurveyed, 0);
+        atDesign = ConveyorLoad.of(feedsAtDesign, unsurveyed, asToday);
     }
 
     ConveyorAssessment assess() {
@@ -56,7 +58,7 @@ final class ConveyorAppraisal {
         }
         List<Assessment> assessments = new ArrayList<>(zones.size());
         for (int i = 0; i < zones.size(); i++) {
-            assessments.add(appraisals.get(i).assessment(findings.get(i), today));
+            assessments.add(appraisals.get(i).assessment(findings.get(i), today, atDesign));
         }
         return new ConveyorAssessment(assessments, today.map(ConveyorLoad::lacking).orElse(unsurveyed + zones.size()),
                 sums(), leadingZone(), leading(assessments));

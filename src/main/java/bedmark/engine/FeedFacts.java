@@ -11,6 +11,7 @@ import bedmark.engine.uncertainty.Uncertain;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** What follows from a zone at one feed: today's, the design's, or that of a remedy. */
 final class FeedFacts {
@@ -175,6 +176,13 @@ final class FeedFacts {
         Uncertain motor = zone.sources().numberOr(Datum.MOTOR_EFFICIENCY, 1);
         return Deduced.from(drivePower, zone.number(Datum.LOADED_HOURS),
                 (power, hours) -> power.over(motor).times(hours));
+    }
+
+    /** What comes with each kWh of the skirts' electricity in a year; nothing where that is not known. */
+    Deduced<Uncertain> electricity(OptionalDouble perKilowattHour) {
+        return perKilowattHour.isEmpty() ? Deduced.nothing() : Deduced.from(drivePower,
+                zone.number(Datum.MOTOR_EFFICIENCY), zone.number(Datum.LOADED_HOURS), (power, motor, hours) ->
+                        power.over(motor).times(hours).times(perKilowattHour.getAsDouble() / 1000));
     }
 
     Deduced<Uncertain> loadingForce() {

@@ -9,10 +9,13 @@ import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Judgement;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Limit;
+import bedmark.engine.verdict.RefusedVerdict;
 import bedmark.engine.verdict.Repeat;
 import bedmark.engine.verdict.Rule;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.EnumMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -22,6 +25,7 @@ import java.util.Set;
 /** The rules of one zone, judged at one feed. */
 final class Findings {
     private static final String OF_THIS_WALK = "/readings/";
+    private static final String HOPPER = "hopper-load-outside";
     private static final Rule[] RULES = Rule.values();
 
     /**
@@ -40,6 +44,13 @@ final class Findings {
             atDesign.ifPresent(design -> design.judge(rules, drawn.chancesAtDesign()));
         }
 
+        /** What was refused at either feed, each once. */
+        List<RefusedVerdict> refused() {
+            Set<RefusedVerdict> all = new LinkedHashSet<>(today.refused);
+            atDesign.ifPresent(design -> all.addAll(design.refused));
+            return List.copyOf(all);
+        }
+
         boolean isDrawn() {
             return today.isDrawn() || atDesign.isPresent() && atDesign.get().isDrawn();
         }
@@ -48,6 +59,7 @@ final class Findings {
     private final Tape tape;
     private final Settings settings;
     private final Map<Rule, Finding> judged = new EnumMap<>(Rule.class);
+    private final List<RefusedVerdict> refused = new ArrayList<>();
     private final Map<Rule, Deduced<Uncertain>> numbers = new EnumMap<>(Rule.class);
 
     private Findings(ZoneFacts zone) {
@@ -90,6 +102,11 @@ final class Findings {
         if (!limit.on()) {
             return;
         }
+        Optional<String> outside = observations.outsideTheMethods(rule);
+        if (outside.isPresent()) {
+            refused.add(new RefusedVerdict(rule, outside.get()));
+            return;
+        }
         if (rule == Rule.SKIRTS_OVER_BUDGET) {
             load.ifPresent(sum -> judge(sum, observed, limit));
         } else if (observed.isKnown()) {
@@ -99,12 +116,14 @@ final class Findings {
         }
     }
 
-    /** A sum that lacks zones can only show that the limit is passed, never that it is kept. */
+    /** A sum that lacks zones, or a hopper's load, can only show that the limit is passed, never that it is kept. */
     private void judge(ConveyorLoad load, Deduced<Uncertain> ownPart, Limit limit) {
         Optional<String> leading = ownPart.value().flatMap(part -> tape.traced(part, OF_THIS_WALK).leading());
         Finding finding = Judgement.of(Rule.SKIRTS_OVER_BUDGET, load.counted(), limit, settings.certainty(), leading);
-        if (load.lacking() == 0 || finding.level() != Level.WITHIN) {
+        if (!load.isLowerBound() || finding.level() != Level.WITHIN) {
             judged.put(Rule.SKIRTS_OVER_BUDGET, finding);
+        } else if (load.feeders() > 0) {
+            refused.add(new RefusedVerdict(Rule.SKIRTS_OVER_BUDGET, HOPPER));
         }
     }
 

@@ -37,7 +37,11 @@ public record LoadingZone(Map<Datum, Reading> data, List<Station> stations, List
         /** Much air comes with the material: 0.5 m³/s or more. */
         HIGH_AIR_FLOW,
         /** The material flows freely. */
-        FREE_FLOWING
+        FREE_FLOWING,
+        /** The belt draws its material from a hopper that stands on it. */
+        BELT_FEEDER,
+        /** The conveyor is skirted along all of its length: there is no open belt after the boards. */
+        FULLY_SKIRTED
     }
 
     /** A zone of which nothing is known. */

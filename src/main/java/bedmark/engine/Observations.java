@@ -58,6 +58,19 @@ final class Observations {
         };
     }
 
+    /**
+     * Why a rule that was read for cannot be judged: the code of an assumption. The belt of a feeder bears its hopper,
+     * of which no reading tells; a conveyor that is skirted all along has no open belt to carry the flow.
+     */
+    Optional<String> outsideTheMethods(Rule rule) {
+        if (rule == Rule.FLOW_OVER_CAPACITY && zone.zone().is(LoadingZone.Mark.FULLY_SKIRTED)
+                && feed.statedFlow().isKnown()) {
+            return Optional.of("no-open-belt");
+        }
+        return rule == Rule.DRIVE_NEAR_RATING && feed != today && zone.zone().is(LoadingZone.Mark.BELT_FEEDER)
+                && runningShareAtLeast().isKnown() ? Optional.of("hopper-load-outside") : Optional.empty();
+    }
+
     /** What the disagreement of the drag methods brings into the observed number of a rule on this zone alone. */
     double spread(Rule rule) {
         return rule == Rule.DRIVE_NEAR_RATING && feed != today

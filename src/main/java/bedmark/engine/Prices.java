@@ -1,16 +1,19 @@
 package bedmark.engine;
 
 import bedmark.engine.uncertainty.ImpossibleReading;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
  * What electricity costs.
  *
- * @param energy of the site's currency, for each kWh
- * @param co2    kg for each kWh
+ * @param energy   of the site's currency, for each kWh
+ * @param currency as the site writes it
+ * @param co2      kg for each kWh
  */
-public record Prices(OptionalDouble energy, OptionalDouble co2) {
-    private static final Prices UNKNOWN = new Prices(OptionalDouble.empty(), OptionalDouble.empty());
+public record Prices(OptionalDouble energy, Optional<String> currency, OptionalDouble co2) {
+    private static final Prices UNKNOWN =
+            new Prices(OptionalDouble.empty(), Optional.empty(), OptionalDouble.empty());
 
     /** @throws ImpossibleReading {@code reading-out-of-range} where one is negative, not finite or beyond 1e6 */
     public Prices {

@@ -1,8 +1,5 @@
 package bedmark.engine;
 
-import bedmark.engine.bed.Profile;
-import bedmark.engine.bed.Section;
-import bedmark.engine.flow.BoardPlacement;
 import bedmark.engine.seal.SealCondition;
 import bedmark.engine.seal.SealSegment;
 import bedmark.engine.uncertainty.Uncertain;
@@ -10,7 +7,6 @@ import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Limit;
 import bedmark.engine.verdict.Remedy;
 import bedmark.engine.verdict.Rule;
-import bedmark.engine.verdict.Sense;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Collections;
@@ -53,8 +49,7 @@ final class Remedies {
     private final FeedFacts now;
     private final Breaches breaches;
     private final double othersShare;
-    /** The factor on the bed's area at which the depth rules that warn today just stop warning; 1 where none does. */
-    private final double depthFactor;
+    private final Room room;
 
     /**
      * @param uncertain   the zone; it is taken as it stands
@@ -66,7 +61,7 @@ final class Remedies {
         now = FeedFacts.today(zone);
         this.othersShare = othersShare;
         breaches = Breaches.of(findings);
-        depthFactor = zone.section().isKnown() && zone.profile().isKnown() ? findDepthFactor() : 1;
+        room = new Room(now, breaches);
     }
 
     /** The remedies that the readings support: first those that may be ranked, the greatest saving ahead. */
@@ -75,13 +70,15 @@ final class Remedies {
             return List.of();
         }
         List<Remedy> remedies = new ArrayList<>();
+        double areaFactor = room.areaFactor();
         freeBed().ifPresent(remedies::add);
-        lowerFeed().ifPresent(remedies::add);
+        lowerFeed(areaFactor).ifPresent(remedies::add);
         widerBoards().ifPresent(remedies::add);
         shorterZone().ifPresent(remedies::add);
         seals("adjust-seal", TIGHT).ifPresent(remedies::add);
         seals("renew-seal", SPENT).ifPresent(remedies::add);
-        fasterBelt().ifPresent(remedies::add);
+        fasterBelt(areaFactor).ifPresent(remedies::add);
+        slowerBelt().ifPresent(remedies::add);
         remedies.sort(BEST_FIRST);
         return remedies;
     }
@@ -96,10 +93,10 @@ final class Remedies {
     }
 
     /** The feed is lowered until what it brings about warns no more; the belt runs longer for the same tonnes. */
-    private Optional<Remedy> lowerFeed() {
-        double factor = depthFactor;
+    private Optional<Remedy> lowerFeed(double areaFactor) {
+        double factor = areaFactor;
         if (breaches.contains(Rule.FLOW_OVER_CAPACITY)) {
-            factor = Math.min(factor, near(Rule.FLOW_OVER_CAPACITY) / now.fill().get().value());
+            factor = Math.min(factor, room.near(Rule.FLOW_OVER_CAPACITY) / now.fill().get().value());
         }
         if (factor <= 0 || factor >= 1) {
             return Optional.empty();
@@ -110,15 +107,29 @@ final class Remedies {
         return Optional.of(remedy("lower-feed", OptionalDouble.of(factor), "1", then, 1 / factor, true, BED));
     }
 
-    /** The belt is run faster until the depth warns no more. Idlers and belt ask for more then, so it is not ranked. */
-    private Optional<Remedy> fasterBelt() {
-        double factor = depthFactor;
-        if (factor <= 0 || factor >= 1) {
+    /** The belt is run faster until the depth warns no more. */
+    private Optional<Remedy> fasterBelt(double areaFactor) {
+        return areaFactor <= 0 || areaFactor >= 1 ? Optional.empty()
+                : Optional.of(otherSpeed("faster-belt", areaFactor));
+    }
+
+    /** The belt is slowed to what its material bears. */
+    private Optional<Remedy> slowerBelt() {
+        if (!breaches.contains(Rule.BELT_TOO_FAST)) {
             return Optional.empty();
         }
-        double speed = zone.beltSpeed().get().value() / factor;
-        FeedFacts then = new FeedFacts(zone.withBeltSpeed(speed), FeedFacts.scaled(zone, Uncertain.exact(factor)), now.statedFlow());
-        return Optional.of(remedy("faster-belt", OptionalDouble.of(speed), "m/s", then, 1, false, SPEED));
+        Limit limit = new Observations(now, now).limit(Rule.BELT_TOO_FAST);
+        double borne = limit.near().orElse(limit.overloaded().orElse(0));
+        return borne <= 0 ? Optional.empty()
+                : Optional.of(otherSpeed("slower-belt", zone.beltSpeed().get().value() / borne));
+    }
+
+    /** Idlers and belt ask for more or less then, which is outside the methods: it is not ranked. */
+    private Remedy otherSpeed(String code, double areaFactor) {
+        double speed = zone.beltSpeed().get().value() / areaFactor;
+        FeedFacts then = new FeedFacts(zone.withBeltSpeed(speed), FeedFacts.scaled(zone, Uncertain.exact(areaFactor)),
+                now.statedFlow());
+        return remedy(code, OptionalDouble.of(speed), "m/s", then, 1, false, SPEED);
     }
 
     /** The boards are set as wide apart as the belt bears, or as the depth would need. */
@@ -127,23 +138,23 @@ final class Remedies {
             return Optional.empty();
         }
         double spacing = zone.spacing().get().value();
-        double widest = widestSpacing();
-        double wanted = widest > spacing * (1 + WORTH_WHILE) ? widest : spacingForDepth().orElse(spacing);
+        double widest = room.widestSpacing();
+        double wanted = widest > spacing * (1 + WORTH_WHILE) ? widest : room.spacingForDepth().orElse(spacing);
         if (wanted <= spacing * (1 + WORTH_WHILE)) {
             return Optional.empty();
         }
         ZoneFacts wider = zone.withSpacing(wanted);
-        FeedFacts then = new FeedFacts(wider, between(wider.section()), now.statedFlow());
+        FeedFacts then = new FeedFacts(wider, Room.between(zone, wider), now.statedFlow());
         return Optional.of(remedy("widen-boards", OptionalDouble.of(wanted), "m", then, 1, true, BOARDS));
     }
 
     /** The zone is cut to the length that it needs to settle. */
     private Optional<Remedy> shorterZone() {
-        if (!zone.settlingLength().isKnown()) {
+        if (!zone.settlingLength().isKnown() || zone.zone().is(LoadingZone.Mark.FULLY_SKIRTED)) {
             return Optional.empty();
         }
         double length = zone.length().get().value();
-        double needed = zone.settlingLength().get().value() * near(Rule.ZONE_TOO_SHORT);
+        double needed = zone.settlingLength().get().value() * room.near(Rule.ZONE_TOO_SHORT);
         if (needed <= 0 || needed >= length * (1 - WORTH_WHILE)) {
             return Optional.empty();
         }
@@ -169,77 +180,6 @@ final class Remedies {
         return Optional.of(remedy(code, OptionalDouble.empty(), "1", then, 1, true, Set.of()));
     }
 
-    /** The bed with the area of today, between other boards. */
-    private Deduced<Profile> between(Deduced<Section> section) {
-        Section today = zone.section().get();
-        return Deduced.from(zone.profile(), section, (bed, other) -> bed.map(level -> other.level(today.area(level))));
-    }
-
-    private double findDepthFactor() {
-        double factor = 1;
-        if (breaches.contains(Rule.BED_OVER_BOARD)) {
-            double allowed = near(Rule.BED_OVER_BOARD) * zone.height().get().value();
-            Section section = zone.section().get();
-            factor = section.area(Uncertain.exact(allowed)).value() / section.area(now.deepest().get()).value();
-        }
-        if (breaches.contains(Rule.BED_OVER_DESIGN)) {
-            double allowed = near(Rule.BED_OVER_DESIGN) * zone.referenceDepth().get().value();
-            double carried = zone.section().get().carriedDepth().value();
-            Profile profile = zone.profile().get();
-            factor = Math.min(factor, Inversion.of(
-                    share -> profile.meanSquare(level -> share * (level + carried) - carried),
-                    allowed * allowed, 0, 1).orElse(1));
-        }
-        return factor;
-    }
-
-    private double widestSpacing() {
-        Uncertain belt = zone.number(Datum.BELT_WIDTH).get();
-        double byWidth = near(Rule.BOARDS_TOO_WIDE) * BoardPlacement.widestSpacing(belt,
-                zone.zone().is(LoadingZone.Mark.FREE_FLOWING)).value();
-        double run = (belt.value() - centre()) / 2 - near(Rule.EDGE_TOO_SMALL) * BoardPlacement.leastEdge(belt).value();
-        return Math.min(byWidth, centre() + 2 * run * cosine());
-    }
-
-    /** The spacing at which the depth rules that warn today just stop warning; none where the belt is too narrow. */
-    private OptionalDouble spacingForDepth() {
-        if (!breaches.contains(Rule.BED_OVER_BOARD) && !breaches.contains(Rule.BED_OVER_DESIGN)) {
-            return OptionalDouble.empty();
-        }
-        double reach = centre() + (zone.number(Datum.BELT_WIDTH).get().value() - centre()) * cosine();
-        double spacing = zone.spacing().get().value();
-        return Inversion.of(width -> depthToSpare(between(zone.withSpacing(width).section()).get()),
-                0, spacing, reach);
-    }
-
-    /** By how much (m) the nearest of the depth rules that warn today is kept; negative where it still warns. */
-    private double depthToSpare(Profile profile) {
-        double spare = Double.POSITIVE_INFINITY;
-        if (breaches.contains(Rule.BED_OVER_BOARD)) {
-            spare = near(Rule.BED_OVER_BOARD) * zone.height().get().value() - profile.deepest().value();
-        }
-        if (breaches.contains(Rule.BED_OVER_DESIGN)) {
-            spare = Math.min(spare, near(Rule.BED_OVER_DESIGN) * zone.referenceDepth().get().value()
-                    - Math.sqrt(profile.meanSquare(level -> level)));
-        }
-        return spare;
-    }
-
-    private double centre() {
-        return zone.isFlat() ? 0 : zone.centreRoll().get().value();
-    }
-
-    private double cosine() {
-        return Math.cos(zone.number(Datum.TROUGH_ANGLE).get().value());
-    }
-
-    /** Where a rule starts to warn, or to overload; out of reach where it does neither. */
-    private double near(Rule rule) {
-        Limit limit = zone.settings().limits().of(rule);
-        return limit.near().orElse(limit.overloaded()
-                .orElse(rule.sense() == Sense.OVER ? Double.POSITIVE_INFINITY : 0));
-    }
-
     private static Set<Rule> rules(Rule... rules) {
         return Collections.unmodifiableSet(EnumSet.copyOf(List.of(rules)));
     }
@@ -248,9 +188,19 @@ final class Remedies {
             boolean ranked, Set<Rule> touched) {
         OptionalDouble saved = ranked && now.energy().isKnown() ? OptionalDouble.of(
                 now.energy().get().value() - then.energy().get().value() * hours) : OptionalDouble.empty();
+        OptionalDouble savedElectrical = zone.number(Datum.MOTOR_EFFICIENCY).isKnown() ? saved : OptionalDouble.empty();
+        Prices prices = zone.settings().prices();
         return new Remedy(code, change, unit, then.meanDepth().get().value(), then.skirtDrag().get().value(),
-                then.skirtPower().get().value(), plain(then.drivePower()), plain(then.driveShare()), saved, ranked,
+                then.skirtPower().get().value(), plain(then.drivePower()), plain(then.driveShare()), saved,
+                times(savedElectrical, prices.energy()), times(savedElectrical, prices.co2()), ranked,
                 breaches.worseIn(Breaches.of(then, touched, othersShare)));
+    }
+
+    /** Of an energy (Wh) and something for each kWh. */
+    private static OptionalDouble times(OptionalDouble energy, OptionalDouble perKilowattHour) {
+        return energy.isPresent() && perKilowattHour.isPresent()
+                ? OptionalDouble.of(energy.getAsDouble() / 1000 * perKilowattHour.getAsDouble())
+                : OptionalDouble.empty();
     }
 
     private static OptionalDouble plain(Deduced<Uncertain> number) {

@@ -46,7 +46,11 @@ public enum Result {
     /** Length over which the feed comes to belt speed (m). */
     ACCELERATION_LENGTH("accelerationLengthM"),
     /** Energy of the skirts in a year of loaded hours (Wh). */
-    ENERGY("energyWhPerYear");
+    ENERGY("energyWhPerYear"),
+    /** What that energy costs, where it is electrical and the site knows a price (the site's currency). */
+    COST("energyCostPerYear"),
+    /** CO₂ of that energy, likewise (kg). */
+    CO2("co2KgPerYear");
 
     private final String key;
 
@@ -62,7 +66,7 @@ public enum Result {
     /** Whether it is a multiple of the skirt drag, and uncertain with it. */
     public boolean followsDrag() {
         return switch (this) {
-            case SKIRT_DRAG, SKIRT_POWER, DRIVE_POWER, DRIVE_SHARE, RUNNING_SHARE, ENERGY -> true;
+            case SKIRT_DRAG, SKIRT_POWER, DRIVE_POWER, DRIVE_SHARE, RUNNING_SHARE, ENERGY, COST, CO2 -> true;
             default -> false;
         };
     }

@@ -34,6 +34,8 @@ final class Results {
         all.put(Result.REFERENCE_DEPTH, zone.referenceDepth());
         all.put(Result.ACCELERATION_LENGTH, zone.accelerationLength());
         all.put(Result.ENERGY, today.energy());
+        all.put(Result.COST, today.electricity(zone.settings().prices().energy()));
+        all.put(Result.CO2, today.electricity(zone.settings().prices().co2()));
         return all;
     }
 

@@ -301,7 +301,11 @@ final class ZoneFacts {
         return Deduced.known(sum);
     }
 
+    /** Nothing where the boards never end. */
     private Deduced<Uncertain> findCapacityArea() {
+        if (zone().is(LoadingZone.Mark.FULLY_SKIRTED)) {
+            return Deduced.nothing();
+        }
         Deduced<Uncertain> usable = Deduced.flat(Deduced.from(number(Datum.BELT_WIDTH), OpenBelt::usableWidth));
         return Deduced.from(usable, isFlat() ? usable : number(Datum.CENTRE_ROLL), number(Datum.TROUGH_ANGLE),
                 number(Datum.SURCHARGE_ANGLE), OpenBelt::area);

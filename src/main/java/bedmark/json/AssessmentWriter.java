@@ -4,6 +4,7 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.engine.Assessment;
 import bedmark.engine.Assumption;
+import bedmark.engine.ConveyorAssessment;
 import bedmark.engine.MethodSpread;
 import bedmark.engine.Result;
 import bedmark.engine.uncertainty.Estimate;
@@ -13,6 +14,7 @@ import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Remedy;
 import bedmark.engine.verdict.Repeat;
 import bedmark.survey.Assessor.Assessed;
+import bedmark.survey.Assessor.AssessedConveyor;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
@@ -31,17 +33,44 @@ public final class AssessmentWriter {
     }
 
     /**
-     * The assessments of a bundle's surveys, in its order.
+     * The assessments of a bundle's surveys, in its order, and of the conveyors that they belong to.
      *
      * @param notice the caution in one sentence
      */
-    public static Branch list(List<Assessed> assessed, String notice) {
+    public static Branch list(List<Assessed> assessed, List<AssessedConveyor> conveyors, String notice) {
         return Branch.EMPTY.with("format", FORMAT).with("version", Node.number(VERSION)).with("notice", notice)
                 .with("surveys", series(assessed, one -> Branch.EMPTY
                         .with("id", one.survey().id().toString())
                         .with("revision", Node.number(one.survey().revision()))
                         .with("transfer", one.survey().transfer())
-                        .with("assessment", write(one.assessment()))));
+                        .with("assessment", write(one.assessment()))))
+                .with("conveyors", series(conveyors, AssessmentWriter::conveyor));
+    }
+
+    /** One conveyor: its zones summed against its drive. */
+    public static Branch conveyor(AssessedConveyor conveyor) {
+        ConveyorAssessment whole = conveyor.assessment();
+        Branch branch = Branch.EMPTY.with("conveyor", conveyor.conveyor());
+        if (!conveyor.round().isEmpty()) {
+            branch = branch.with("round", conveyor.round());
+        }
+        branch = branch.with("level", whole.level().code())
+                .with("surveys", texts(conveyor.surveys().stream().map(survey -> survey.id().toString()).toList()))
+                .with("zonesLacking", Node.number(whole.lacking()));
+        Branch uncertainty = Branch.EMPTY;
+        for (Map.Entry<Result, Estimate> sum : whole.sums().entrySet()) {
+            branch = branch.with(sum.getKey().key(), number(sum.getValue().value()));
+            uncertainty = uncertainty.with(sum.getKey().key(), number(sum.getValue().standardUncertainty()));
+        }
+        branch = branch.with("uncertainty", uncertainty);
+        if (whole.leadingZone().isPresent()) {
+            branch = branch.with("leadingZone",
+                    conveyor.surveys().get(whole.leadingZone().getAsInt()).transfer());
+        }
+        if (whole.leading().isPresent()) {
+            branch = branch.with("leading", whole.leading().get().code());
+        }
+        return branch.with("findings", series(whole.driveFindings(), AssessmentWriter::finding));
     }
 
     /** One assessment. */
@@ -60,6 +89,9 @@ public final class AssessmentWriter {
         }
         if (assessment.energyKind().isPresent()) {
             branch = branch.with("energyIs", assessment.energyKind().get().code());
+        }
+        if (assessment.currency().isPresent() && assessment.get(Result.COST).isPresent()) {
+            branch = branch.with("currency", assessment.currency().get());
         }
         if (assessment.leading().isPresent()) {
             branch = branch.with("leading", assessment.leading().get().code());
@@ -84,6 +116,10 @@ public final class AssessmentWriter {
         if (!assessment.findingsAtDesign().isEmpty()) {
             branch = branch.with("findingsAtDesignFeed",
                     series(assessment.findingsAtDesign(), AssessmentWriter::finding));
+        }
+        if (!assessment.refused().isEmpty()) {
+            branch = branch.with("refused", series(assessment.refused(), refused -> Branch.EMPTY
+                    .with("code", refused.rule().code()).with("because", refused.because())));
         }
         branch = branch.with("allowedDepths", series(assessment.allowedDepths(), AssessmentWriter::allowed))
                 .with("remedies", series(assessment.remedies(), AssessmentWriter::remedy))
@@ -129,6 +165,9 @@ public final class AssessmentWriter {
         branch = optional(branch, "overloaded", finding.overloaded());
         branch = optional(branch, "probabilityNear", finding.probabilityNear());
         branch = optional(branch, "probabilityOverloaded", finding.probabilityOverloaded());
+        if (finding.drawn()) {
+            branch = branch.with("by", "monte-carlo");
+        }
         return branch.with("action", finding.action()).with("source", finding.source())
                 .with("assumption", Node.flag(finding.assumption()));
     }
@@ -144,7 +183,9 @@ public final class AssessmentWriter {
                 .with("meanDepthM", number(remedy.meanDepth()))
                 .with("skirtDragN", number(remedy.skirtDrag()))
                 .with("skirtPowerW", number(remedy.skirtPower()));
-        branch = optional(optional(branch, "drivePowerW", remedy.drivePower()), "savedWhPerYear", remedy.savedWh())
+        branch = optional(optional(branch, "drivePowerW", remedy.drivePower()), "driveShare", remedy.driveShare());
+        branch = optional(optional(optional(branch, "savedWhPerYear", remedy.savedWh()),
+                "savedCostPerYear", remedy.savedCost()), "savedCo2KgPerYear", remedy.savedCo2())
                 .with("ranked", Node.flag(remedy.ranked()));
         return remedy.refusedBecause().isPresent()
                 ? branch.with("refusedBecause", remedy.refusedBecause().get().code()) : branch;

@@ -131,7 +131,8 @@ final class SiteSettings {
         Optional<Branch> tariff = plant.branch("tariff");
         OptionalDouble energy = tariff.isEmpty() ? OptionalDouble.empty()
                 : below(Pointer.of("tariff"), () -> number(tariff.get(), "energy", OptionalDouble.empty()));
-        return new Prices(energy, number(plant, "co2Factor", OptionalDouble.empty()));
+        Optional<String> currency = tariff.flatMap(row -> below(Pointer.of("tariff"), () -> row.text("currency")));
+        return new Prices(energy, currency, number(plant, "co2Factor", OptionalDouble.empty()));
     }
 
     private static boolean flag(Branch rows, String key) {

@@ -120,6 +120,12 @@ final class ZoneMapping {
         if (flag("transfer", "highAirFlow")) {
             zone = zone.withMark(LoadingZone.Mark.HIGH_AIR_FLOW);
         }
+        if (flag("transfer", "beltFeeder")) {
+            zone = zone.withMark(LoadingZone.Mark.BELT_FEEDER);
+        }
+        if (flag("conveyor", "fullySkirted")) {
+            zone = zone.withMark(LoadingZone.Mark.FULLY_SKIRTED);
+        }
         if (flag("material", "freeFlowing")) {
             zone = zone.withMark(LoadingZone.Mark.FREE_FLOWING);
         }

@@ -16,6 +16,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Random;
+import java.util.Set;
 import org.junit.jupiter.api.Test;
 
 /** The engine against the decimal reference, over random troughed zones. */
@@ -90,7 +91,7 @@ class DecimalReferenceTest {
         for (Datum board : List.of(Datum.READ_SPACING, Datum.REGISTER_SPACING)) {
             Zones.put(data, board, Math.min(data.get(board).value(), reach * 0.999));
         }
-        return zone.with(data);
+        return new LoadingZone(data, zone.stations(), zone.seals(), zone.speedClass(), Set.of(), List.of());
     }
 
     private DecimalReference reference(LoadingZone zone) {

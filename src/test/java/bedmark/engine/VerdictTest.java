@@ -183,8 +183,8 @@ class VerdictTest {
         Settings without = Settings.standard().with(Settings.standard().limits().without(Rule.BED_OVER_DESIGN));
         Assessment assessment = Engine.assess(depth(0.25), without);
         assertTrue(assessment.findings().stream().noneMatch(finding -> finding.rule() == Rule.BED_OVER_DESIGN));
-        assertEquals(List.of(Rule.BED_OVER_BOARD),
-                assessment.allowedDepths().stream().map(AllowedDepth::rule).toList());
+        assertEquals(List.of(Rule.BED_OVER_BOARD, Rule.FLOW_OVER_CAPACITY, Rule.DRIVE_NEAR_RATING,
+                Rule.SKIRTS_OVER_BUDGET), assessment.allowedDepths().stream().map(AllowedDepth::rule).toList());
     }
 
     @Test
@@ -212,7 +212,7 @@ class VerdictTest {
 
     @Test
     void theLowestAllowedDepthNamesItsRule() {
-        Assessment assessment = Engine.assess(HEALTHY, Settings.standard());
+        Assessment assessment = Engine.assess(HEALTHY.without(Datum.THROUGHPUT), Settings.standard());
         AllowedDepth lowest = assessment.lowestAllowedDepth().orElseThrow();
         assertEquals(Rule.BED_OVER_DESIGN, lowest.rule());
         assertEquals(1.25 * 0.16, lowest.overloaded().orElseThrow(), 1e-15);

@@ -39,7 +39,8 @@ class AssessmentWriterTest {
         }
         for (Path file : files) {
             Bundle bundle = BundleReader.read(Files.readAllBytes(file));
-            Branch list = AssessmentWriter.list(new Assessor(bundle.register()).assess(bundle.surveys()), "A notice.");
+            Assessor.Judged judged = new Assessor(bundle.register()).judge(bundle.surveys());
+            Branch list = AssessmentWriter.list(judged.surveys(), judged.conveyors(), "A notice.");
             LISTED.add(JsonReader.read(JsonWriter.indented(list)).root());
         }
         LISTED.forEach(list -> list.branches("surveys")

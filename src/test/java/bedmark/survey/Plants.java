@@ -6,9 +6,9 @@ import java.nio.charset.StandardCharsets;
 import java.util.UUID;
 
 /** Registers and surveys for tests, written as documents with single quotes. */
-final class Plants {
+public final class Plants {
     /** What every plant of these tests holds: two materials, two conveyors, three loading zones. */
-    static final String ROWS = "'materials':[{'id':'stone','skirtFrictionFactor':0.128,'bulkDensity':{'value':1400,"
+    public static final String ROWS = "'materials':[{'id':'stone','skirtFrictionFactor':0.128,'bulkDensity':{'value':1400,"
             + "'unit':'kg/m3'},'angleOfRepose':{'value':38,'unit':'deg'},'surchargeAngle':{'value':20,'unit':'deg'}},"
             + "{'id':'coal','bulkDensity':{'value':800,'unit':'kg/m3'},'angleOfRepose':{'value':38,'unit':'deg'},"
             + "'surchargeAngle':{'value':20,'unit':'deg'}}],"
@@ -31,17 +31,17 @@ final class Plants {
                 + "'unit':'t/h'},'feedVelocity':{'value':0.5,'unit':'m/s'},'impactLength':{'value':1,'unit':'m'}}";
     }
 
-    static Branch read(String text) {
+    public static Branch read(String text) {
         return JsonReader.read(text.replace('\'', '"').getBytes(StandardCharsets.UTF_8)).root();
     }
 
     /** A register with more keys of the plant, each with a comma before it. */
-    static Register register(String more) {
+    public static Register register(String more) {
         return new Register(read("{" + ROWS + more + "}"));
     }
 
     /** A complete survey; more readings replace those of the same key. */
-    static Survey survey(String transfer, String moreReadings) {
+    public static Survey survey(String transfer, String moreReadings) {
         Branch readings = read("{'loadingZoneLength':{'value':6,'unit':'m'},'beltSpeed':{'value':2,'unit':'m/s'},"
                 + "'depthMethod':'at-board','bedDepths':[{'position':{'value':3,'unit':'m'},"
                 + "'depth':{'value':150,'unit':'mm'}}],'seals':[{'side':'left','type':'vertical','condition':'sound',"

@@ -32,7 +32,7 @@ class EveryWordTest {
             Pattern.compile("(?:Defect\\.(?:at|in)\\([^;]*?|ImpossibleReading\\()\"([a-z0-9]+(?:-[a-z0-9]+)+)\"");
     private static final Pattern ASSUMPTION = Pattern.compile("Assumption\\.of\\(\"([a-z-]+)\"");
     private static final Pattern UNFIT = Pattern.compile("unfit\\(\"([a-z-]+)\"");
-    private static final Pattern REMEDY = Pattern.compile("remedy\\(\"([a-z-]+)\"|seals\\(\"([a-z-]+)\"");
+    private static final Pattern REMEDY = Pattern.compile("(?:remedy|seals|otherSpeed)\\(\"([a-z-]+)\"");
 
     private static List<String> sources() {
         try (Stream<Path> files = Files.walk(Path.of("src/main/java"))) {

@@ -15,10 +15,12 @@ import java.util.OptionalDouble;
  * @param drivePower     new power at the motor shaft (W)
  * @param driveShare     the same as a share of the rated power
  * @param savedWh        energy saved in a year (Wh), counted as the assessment counts it
+ * @param savedCost      the same in the site's currency, where the electrical energy and its price are known
+ * @param savedCo2       the same in kg of CO₂, likewise
  * @param ranked         whether the saving may be compared with that of other remedies
  * @param refusedBecause the rule that the change would break
  */
 public record Remedy(String code, OptionalDouble change, String unit, double meanDepth, double skirtDrag,
         double skirtPower, OptionalDouble drivePower, OptionalDouble driveShare, OptionalDouble savedWh,
-        boolean ranked, Optional<Rule> refusedBecause) {
+        OptionalDouble savedCost, OptionalDouble savedCo2, boolean ranked, Optional<Rule> refusedBecause) {
 }

@@ -72,7 +72,8 @@ class ConveyorDocumentTest {
         assertEquals(Optional.of("undecided"), doubtful.text("level"));
         assertEquals(Optional.of("/readings/bedDepths/0/depth"), doubtful.text("repeat"));
         assertTrue(doubtful.has("repeatFor") && doubtful.has("repeatStandardUncertainty"));
-        assertTrue(doubtful.branches("findings").stream()
+        Branch drawn = assessment(written(",'limits':{'monteCarloTrials':2000}", FINE, DOUBTFUL), 1);
+        assertTrue(drawn.branches("findings").stream()
                 .anyMatch(finding -> finding.text("by").equals(Optional.of("monte-carlo"))));
         Survey thin = Plants.survey("t1", "'bedDepths':[{'position':{'value':3,'unit':'m'},'depth':{'value':80,"
                 + "'unit':'mm'}}]");

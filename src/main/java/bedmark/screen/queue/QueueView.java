@@ -3,9 +3,8 @@ package bedmark.screen.queue;
 import bedmark.index.Export;
 import bedmark.index.SurveyLine;
 import bedmark.screen.Heads;
-import bedmark.screen.Listening;
 import bedmark.screen.Navigator;
-import bedmark.screen.Screen;
+import bedmark.screen.SidedScreen;
 import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
@@ -24,20 +23,17 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
-import javafx.scene.Node;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ProgressBar;
 import javafx.scene.control.ScrollPane;
-import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** The way to the office: completed surveys into the queue, the queue into a folder or onto a stick, the receipt. */
-public final class QueueView implements Screen {
+public final class QueueView extends SidedScreen {
     private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm");
 
     private static final List<LevelShape> WORST_FIRST = List.of(LevelShape.OVERLOADED, LevelShape.UNDECIDED,
@@ -46,25 +42,21 @@ public final class QueueView implements Screen {
     private final Workplace workplace;
     private final QueueModel model;
     private final Wording wording;
-    private final Listening listening = new Listening();
     private final VBox steps = new VBox();
-    private final VBox outcome = new VBox();
     private final ProgressBar bar = new ProgressBar(0);
-    private final BorderPane body = new BorderPane();
-    private final VBox head;
-    private final FootBar foot;
 
     public QueueView(Workplace workplace, QueueModel model, RoundModel round, Navigator navigator) {
+        super("summary");
         this.workplace = workplace;
         this.model = model;
         this.wording = workplace.wording();
-        this.head = Heads.head(workplace, listening, wording.text("screen.queue.title"), round.round().name());
         ActionButton back = ActionButton.with(Icon.BACK, ContentDisplay.LEFT, Weight.QUIET,
                 wording.text("screen.round.title"), () -> navigator.toRound(round));
         back.setId("foot-back");
-        this.foot = new FootBar(Optional.of(back), Optional.empty(), Optional.empty());
+        frame(Heads.head(workplace, listening, wording.text("screen.queue.title"), round.round().name()),
+                new FootBar(Optional.of(back), Optional.empty(), Optional.empty()));
         steps.getStyleClass().add("questions");
-        outcome.getStyleClass().add("summary");
+        side.getStyleClass().add("summary");
         bar.setMaxWidth(Double.MAX_VALUE);
         body.getStyleClass().add("queue-body");
         body.setCenter(scrolling(steps));
@@ -151,20 +143,20 @@ public final class QueueView implements Screen {
     }
 
     private void showOutcome() {
-        outcome.getChildren().clear();
+        side.getChildren().clear();
         model.troubleProperty().get().ifPresent(defect -> {
             Label trouble = wrapped(wording.sentence(defect));
             trouble.getStyleClass().add("trouble-text");
             trouble.setId("trouble");
-            outcome.getChildren().addAll(new SectionHeader(wording.text("screen.queue.failed")), trouble);
+            side.getChildren().addAll(new SectionHeader(wording.text("screen.queue.failed")), trouble);
         });
         model.receiptProperty().get().ifPresent(this::showReceipt);
-        outcome.getChildren().add(new SectionHeader(wording.text("screen.queue.left")));
+        side.getChildren().add(new SectionHeader(wording.text("screen.queue.left")));
         List<Export> exports = model.exportsProperty().get();
         if (exports.isEmpty()) {
-            outcome.getChildren().add(wrapped(wording.text("screen.queue.none-left")));
+            side.getChildren().add(wrapped(wording.text("screen.queue.none-left")));
         }
-        exports.stream().limit(6).forEach(export -> outcome.getChildren().add(wrapped(
+        exports.stream().limit(6).forEach(export -> side.getChildren().add(wrapped(
                 wording.text("screen.queue.export-line", TIME.format(export.at()), export.pack(),
                         export.surveys().size(), export.folder()))));
     }
@@ -180,7 +172,7 @@ public final class QueueView implements Screen {
                 line("screen.receipt.key", receipt.fingerprint()),
                 line("screen.receipt.time", TIME.format(receipt.at())));
         box.getStyleClass().add("receipt");
-        outcome.getChildren().add(box);
+        side.getChildren().add(box);
     }
 
     private VBox line(String key, String value) {
@@ -194,43 +186,5 @@ public final class QueueView implements Screen {
         label.setWrapText(true);
         label.setMinHeight(Region.USE_PREF_SIZE);
         return label;
-    }
-
-    @Override
-    public Node head() {
-        return head;
-    }
-
-    @Override
-    public Node body() {
-        return body;
-    }
-
-    @Override
-    public Node foot() {
-        return foot;
-    }
-
-    @Override
-    public void turned(boolean portrait) {
-        body.setRight(null);
-        body.setBottom(null);
-        outcome.getStyleClass().setAll("summary", portrait ? "portrait" : "landscape");
-        if (portrait) {
-            body.setBottom(outcome);
-        } else {
-            body.setRight(outcome);
-        }
-        VBox.setVgrow(outcome, Priority.ALWAYS);
-    }
-
-    @Override
-    public void shown() {
-        body.requestFocus();
-    }
-
-    @Override
-    public void left() {
-        listening.end();
     }
 }

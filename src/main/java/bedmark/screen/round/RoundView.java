@@ -1,9 +1,8 @@
 package bedmark.screen.round;
 
 import bedmark.screen.Heads;
-import bedmark.screen.Listening;
 import bedmark.screen.Navigator;
-import bedmark.screen.Screen;
+import bedmark.screen.SidedScreen;
 import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
@@ -22,11 +21,9 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import javafx.geometry.Pos;
-import javafx.scene.Node;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
-import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
@@ -36,35 +33,31 @@ import javafx.scene.layout.VBox;
 import org.controlsfx.control.textfield.CustomTextField;
 
 /** The round: its stops in walking order, grouped by area; beside them what was found so far. */
-public final class RoundView implements Screen {
+public final class RoundView extends SidedScreen {
     private final Workplace workplace;
     private final RoundModel model;
     private final Navigator navigator;
     private final Wording wording;
-    private final Listening listening = new Listening();
     private final VBox list = new VBox();
     private final ScrollPane scroll = new ScrollPane(list);
-    private final VBox summary = new VBox();
     private boolean portrait;
-    private final BorderPane body = new BorderPane();
     private final CustomTextField search = new CustomTextField();
-    private final VBox head;
-    private final FootBar foot;
 
     public RoundView(Workplace workplace, RoundModel model, Navigator navigator) {
+        super("summary");
         this.workplace = workplace;
         this.model = model;
         this.navigator = navigator;
         this.wording = workplace.wording();
-        this.head = Heads.head(workplace, listening, model.round().name(), workplace.site().register().name());
-        this.foot = footBar();
+        frame(Heads.head(workplace, listening, model.round().name(), workplace.site().register().name()),
+                footBar());
         list.getStyleClass().add("rows");
         scroll.setFitToWidth(true);
         scroll.getStyleClass().add("form-scroll");
         VBox.setVgrow(scroll, Priority.ALWAYS);
         VBox stops = new VBox(searchField(), scroll);
         stops.getStyleClass().add("stops");
-        summary.getStyleClass().add("summary");
+        side.getStyleClass().add("summary");
         body.getStyleClass().add("round-body");
         body.setCenter(stops);
         listening.to(model.shownProperty(), rows -> layOut());
@@ -205,7 +198,7 @@ public final class RoundView implements Screen {
         back.setId("reason-cancel");
         back.setMaxWidth(Double.MAX_VALUE);
         pane.getChildren().add(back);
-        summary.getChildren().setAll(pane);
+        side.getChildren().setAll(pane);
     }
 
     private void summarise() {
@@ -219,7 +212,7 @@ public final class RoundView implements Screen {
             column.setPercentWidth(100.0 / columns);
             found.getColumnConstraints().add(column);
         }
-        summary.getChildren().setAll(new SectionHeader(wording.text("screen.round.found")), found);
+        side.getChildren().setAll(new SectionHeader(wording.text("screen.round.found")), found);
         int place = 0;
         for (LevelShape shape : List.of(LevelShape.OVERLOADED, LevelShape.UNDECIDED, LevelShape.INCOMPLETE,
                 LevelShape.NEAR, LevelShape.WITHIN, LevelShape.NOT_INSPECTED)) {
@@ -242,7 +235,7 @@ public final class RoundView implements Screen {
         Label caution = new Label(wording.text("screen.caution.always"));
         caution.setWrapText(true);
         caution.setMinHeight(Region.USE_PREF_SIZE);
-        summary.getChildren().addAll(export, caution);
+        side.getChildren().addAll(export, caution);
     }
 
     private FootBar footBar() {
@@ -261,32 +254,10 @@ public final class RoundView implements Screen {
     }
 
     @Override
-    public Node head() {
-        return head;
-    }
-
-    @Override
-    public Node body() {
-        return body;
-    }
-
-    @Override
-    public Node foot() {
-        return foot;
-    }
-
-    @Override
     public void turned(boolean upright) {
         portrait = upright;
         summarise();
-        body.setRight(null);
-        body.setBottom(null);
-        summary.getStyleClass().setAll("summary", portrait ? "portrait" : "landscape");
-        if (portrait) {
-            body.setBottom(summary);
-        } else {
-            body.setRight(summary);
-        }
+        super.turned(upright);
     }
 
     @Override
@@ -298,6 +269,6 @@ public final class RoundView implements Screen {
     @Override
     public void left() {
         search.textProperty().unbindBidirectional(model.searchProperty());
-        listening.end();
+        super.left();
     }
 }

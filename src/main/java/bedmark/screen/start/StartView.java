@@ -2,10 +2,9 @@ package bedmark.screen.start;
 
 import bedmark.quantity.UnitSystem;
 import bedmark.screen.Heads;
-import bedmark.screen.Listening;
 import bedmark.screen.Navigator;
 import bedmark.screen.Preferences;
-import bedmark.screen.Screen;
+import bedmark.screen.SidedScreen;
 import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
@@ -20,45 +19,39 @@ import bedmark.words.Words;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
-import javafx.scene.Node;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ProgressBar;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
-import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** The start of a walk: who, which round, how the screen is to be; beside it the safety card. */
-public final class StartView implements Screen {
+public final class StartView extends SidedScreen {
     private static final int CAUTIONS = 6;
 
     private final Workplace workplace;
     private final StartModel model;
     private final Navigator navigator;
     private final Wording wording;
-    private final Listening listening = new Listening();
     private final VBox questions = new VBox();
-    private final VBox card = new VBox();
     private final ScrollPane scroll = new ScrollPane(questions);
-    private final BorderPane body = new BorderPane();
     private final TextField person = new TextField();
-    private final VBox head;
-    private final FootBar foot;
 
     public StartView(Workplace workplace, StartModel model, Navigator navigator) {
+        super("safety-card");
         this.workplace = workplace;
         this.model = model;
         this.navigator = navigator;
         this.wording = workplace.wording();
-        this.head = Heads.head(workplace, listening, wording.text("screen.name"), wording.text("screen.start.title"));
-        this.foot = footBar();
+        frame(Heads.head(workplace, listening, wording.text("screen.name"), wording.text("screen.start.title")),
+                footBar());
         questions.getStyleClass().add("questions");
-        card.getStyleClass().add("safety-card");
+        side.getStyleClass().add("safety-card");
         scroll.setFitToWidth(true);
         scroll.getStyleClass().add("form-scroll");
         body.getStyleClass().add("start-body");
@@ -207,16 +200,16 @@ public final class StartView implements Screen {
     private void safetyCard() {
         Label title = wrapped(wording.text("screen.safety.title"));
         title.getStyleClass().add("card-title");
-        card.getChildren().add(title);
+        side.getChildren().add(title);
         for (int i = 1; i <= CAUTIONS; i++) {
-            card.getChildren().add(wrapped(wording.text("screen.safety." + i)));
+            side.getChildren().add(wrapped(wording.text("screen.safety." + i)));
         }
         ToggleButton read = new ToggleButton(wording.text("screen.safety.read"));
         read.setId("caution-read");
         read.setWrapText(true);
         read.setMaxWidth(Double.MAX_VALUE);
         read.selectedProperty().bindBidirectional(model.cautionReadProperty());
-        card.getChildren().add(read);
+        side.getChildren().add(read);
     }
 
     private static Label wrapped(String text) {
@@ -242,33 +235,6 @@ public final class StartView implements Screen {
     }
 
     @Override
-    public Node head() {
-        return head;
-    }
-
-    @Override
-    public Node body() {
-        return body;
-    }
-
-    @Override
-    public Node foot() {
-        return foot;
-    }
-
-    @Override
-    public void turned(boolean portrait) {
-        body.setRight(null);
-        body.setBottom(null);
-        card.getStyleClass().setAll("safety-card", portrait ? "portrait" : "landscape");
-        if (portrait) {
-            body.setBottom(card);
-        } else {
-            body.setRight(card);
-        }
-    }
-
-    @Override
     public void shown() {
         if (model.hasPlant() && model.personProperty().get().isEmpty()) {
             person.requestFocus();
@@ -280,6 +246,6 @@ public final class StartView implements Screen {
     @Override
     public void left() {
         model.personProperty().unbind();
-        listening.end();
+        super.left();
     }
 }

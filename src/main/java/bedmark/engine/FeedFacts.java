@@ -19,6 +19,7 @@ final class FeedFacts {
     private final Deduced<Profile> profile;
     private final Deduced<Uncertain> statedFlow;
     private final Deduced<Uncertain> integralOfSquare;
+    private final Deduced<Uncertain> meanSquare;
     private final Deduced<Uncertain> meanDepth;
     private final Deduced<Uncertain> area;
     private final Deduced<Uncertain> impliedFlow;
@@ -27,6 +28,7 @@ final class FeedFacts {
     private final Deduced<Uncertain> skirtDrag;
     private final Deduced<Uncertain> skirtPower;
     private final Deduced<Uncertain> drivePower;
+    private final Deduced<Uncertain> driveShare;
 
     /**
      * @param profile    the bed at this feed
@@ -38,6 +40,7 @@ final class FeedFacts {
         this.statedFlow = statedFlow;
         Deduced<Uncertain> speed = zone.beltSpeed();
         integralOfSquare = Deduced.from(profile, Profile::integralOfSquare);
+        meanSquare = Deduced.from(integralOfSquare, zone.length(), Uncertain::over);
         meanDepth = Deduced.from(profile, bed -> bed.integral().over(bed.length()));
         area = Deduced.from(profile, zone.section(), (bed, section) -> section.area(bed.meanLevel()));
         impliedFlow = Deduced.from(zone.number(Datum.BULK_DENSITY), speed, area,
@@ -47,6 +50,7 @@ final class FeedFacts {
         skirtDrag = Deduced.from(materialDrag, zone.sealDrag(), Uncertain::plus);
         skirtPower = Deduced.from(skirtDrag, speed, Uncertain::times);
         drivePower = Deduced.from(skirtPower, zone.number(Datum.DRIVE_EFFICIENCY), Uncertain::over);
+        driveShare = Deduced.from(drivePower, zone.number(Datum.RATED_POWER), Uncertain::over);
     }
 
     /** As it was read. */
@@ -96,7 +100,7 @@ final class FeedFacts {
     }
 
     Deduced<Uncertain> meanSquare() {
-        return Deduced.from(integralOfSquare, zone.length(), Uncertain::over);
+        return meanSquare;
     }
 
     Deduced<Uncertain> meanDepth() {
@@ -109,7 +113,7 @@ final class FeedFacts {
 
     /** (Mean depth)² over the mean of the square; nothing where the bed touches nowhere. */
     Deduced<Uncertain> squareOfMeanShare() {
-        return Deduced.flat(Deduced.from(meanSquare(), meanDepth, (square, mean) -> square.value() == 0
+        return Deduced.flat(Deduced.from(meanSquare, meanDepth, (square, mean) -> square.value() == 0
                 ? Optional.empty() : Optional.of(mean.square().over(square))));
     }
 
@@ -162,13 +166,18 @@ final class FeedFacts {
     }
 
     Deduced<Uncertain> driveShare() {
-        return Deduced.from(drivePower, zone.number(Datum.RATED_POWER), Uncertain::over);
+        return driveShare;
     }
 
-    /** What the disagreement of the drag methods brings into the drive's share. */
+    /** What the disagreement of the drag methods brings into the material drag (N); 0 where it does not count. */
+    double spread() {
+        return integralOfSquare.isKnown() ? zone.spreadPerSquare() * integralOfSquare.get().value() : 0;
+    }
+
+    /** The same in the drive's share. */
     double spreadOfShare() {
-        return driveShare().isKnown() && skirtDrag.get().value() > 0
-                ? Spread.standardUncertainty(this) * driveShare().get().value() / skirtDrag.get().value() : 0;
+        return driveShare.isKnown() && skirtDrag.get().value() > 0
+                ? spread() * driveShare.get().value() / skirtDrag.get().value() : 0;
     }
 
     /** Energy of the skirts in a year (Wh): electrical where the motor's efficiency is known, else the shaft's. */

@@ -44,7 +44,9 @@ final class Requirements {
     /** The required ones, then what else any of the numbers waits for. */
     List<String> all(List<String> required, Collection<? extends Deduced<?>> numbers) {
         Set<String> missing = new LinkedHashSet<>(required);
-        numbers.forEach(number -> missing.addAll(number.missing()));
+        for (Deduced<?> number : numbers) {
+            missing.addAll(number.missing());
+        }
         return withoutTheWhole(missing);
     }
 
@@ -60,6 +62,11 @@ final class Requirements {
     }
 
     private boolean isBegun(String beginning) {
-        return zone.zone().unfinished().stream().anyMatch(place -> place.startsWith(beginning));
+        for (String place : zone.zone().unfinished()) {
+            if (place.startsWith(beginning)) {
+                return true;
+            }
+        }
+        return false;
     }
 }

@@ -27,10 +27,12 @@ final class Spread {
         zone = feed.zone();
     }
 
-    /** What the disagreement of the methods brings into the material drag (N); see {@link MethodSpread}. */
-    static double standardUncertainty(FeedFacts feed) {
-        ZoneFacts zone = feed.zone();
-        boolean counts = zone.settings().conventions().spread() && feed.materialDrag().isKnown()
+    /**
+     * What the disagreement of the methods brings into the material drag (see {@link MethodSpread}), for each m³ of the
+     * integral of the square of the depth, to which all of those methods are proportional (N/m³).
+     */
+    static double perSquare(ZoneFacts zone) {
+        boolean counts = zone.settings().conventions().spread()
                 && (zone.method() == DragMethod.TABULATED || zone.method() == DragMethod.RANKINE);
         Deduced<Uncertain> factor = zone.number(Datum.SKIRT_FRICTION_FACTOR);
         Deduced<Uncertain> repose = zone.number(Datum.ANGLE_OF_REPOSE);
@@ -38,10 +40,9 @@ final class Spread {
         if (!counts || !factor.isKnown() || !repose.isKnown() || !density.isKnown()) {
             return 0;
         }
-        Uncertain square = feed.integralOfSquare().get().certain();
-        double tabulated = TabulatedFactor.drag(factor.get().certain(), square).value();
+        double tabulated = TabulatedFactor.drag(factor.get().certain(), Uncertain.ONE).value();
         double rankine = RankinePressure.drag(zone.sources().numberOr(Datum.WALL_FRICTION, 1).certain(),
-                repose.get().certain(), density.get().certain(), square).value();
+                repose.get().certain(), density.get().certain(), Uncertain.ONE).value();
         return Math.abs(tabulated - rankine) / OF_RECTANGLE;
     }
 
@@ -63,7 +64,7 @@ final class Spread {
         double least = methods.get(lowest).get().value();
         double most = methods.get(highest).get().value();
         return Optional.of(new MethodSpread(lowest, highest, most / least, reasons(lowest, least, highest, most),
-                standardUncertainty(feed)));
+                feed.spread()));
     }
 
     private List<Reason> reasons(DragMethod lowest, double least, DragMethod highest, double most) {

@@ -38,6 +38,7 @@ final class ZoneFacts {
     private final Deduced<Uncertain> referenceDepth;
     private final Deduced<Uncertain> accelerationLength;
     private final Deduced<Uncertain> settlingLength;
+    private final double spreadPerSquare;
 
     ZoneFacts(Sources sources) {
         this.sources = sources;
@@ -54,6 +55,7 @@ final class ZoneFacts {
                 (depth, belt) -> depth.max(belt.times(SHARE_OF_WIDTH))));
         accelerationLength = findAccelerationLength();
         settlingLength = findSettlingLength();
+        spreadPerSquare = Spread.perSquare(this);
     }
 
     /** The same zone with its numbers taken as they stand. */
@@ -71,6 +73,7 @@ final class ZoneFacts {
         referenceDepth = other.referenceDepth.map(Uncertain::certain);
         accelerationLength = other.accelerationLength.map(Uncertain::certain);
         settlingLength = other.settlingLength.map(Uncertain::certain);
+        spreadPerSquare = other.spreadPerSquare;
     }
 
     /** The same zone after a change of one thing; the bed that comes of it is the business of who changes. */
@@ -89,6 +92,7 @@ final class ZoneFacts {
         referenceDepth = other.referenceDepth;
         accelerationLength = beltSpeed == other.beltSpeed ? other.accelerationLength : findAccelerationLength();
         settlingLength = beltSpeed == other.beltSpeed ? other.settlingLength : findSettlingLength();
+        spreadPerSquare = other.spreadPerSquare;
     }
 
     /** The zone without uncertainty, from which a change can be computed at little cost. */
@@ -188,6 +192,11 @@ final class ZoneFacts {
 
     Deduced<Uncertain> settlingLength() {
         return settlingLength;
+    }
+
+    /** See {@link Spread#perSquare}. */
+    double spreadPerSquare() {
+        return spreadPerSquare;
     }
 
     /** The method in use: the site's, else the tabulated factor where the material has one, else Rankine's. */

@@ -2,6 +2,7 @@ package bedmark.engine;
 
 import bedmark.engine.bed.Section;
 import bedmark.engine.drag.RankinePressure;
+import bedmark.engine.drag.SiteFactor;
 import bedmark.engine.drag.SpecialResistance;
 import bedmark.engine.drag.TabulatedFactor;
 import bedmark.engine.flow.AccelerationLength;
@@ -24,6 +25,8 @@ import java.util.function.ToDoubleFunction;
 final class GoldenFormulas {
     private static final Map<String, ToDoubleFunction<Arguments>> ALL = Map.ofEntries(
             formula("tabulated-factor", a -> TabulatedFactor.drag(a.get("factor"),
+                    a.get("length").times(a.get("depth").square()))),
+            formula("site-factor", a -> SiteFactor.drag(a.get("factor"),
                     a.get("length").times(a.get("depth").square()))),
             formula("rankine-pressure", a -> RankinePressure.drag(a.get("wallFriction"), a.get("frictionAngle"),
                     a.get("density"), a.get("length").times(a.get("depth").square()))),

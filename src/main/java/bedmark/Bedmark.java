@@ -3,6 +3,8 @@ package bedmark;
 import bedmark.command.BedmarkCommand;
 import bedmark.command.Surroundings;
 import bedmark.index.Store;
+import bedmark.index.StoreFolder;
+import bedmark.index.StoreOptions;
 import bedmark.screen.BedmarkApp;
 import bedmark.words.Words;
 import java.io.PrintWriter;
@@ -38,7 +40,12 @@ public final class Bedmark {
         }
         TOOLKIT.setLevel(Level.SEVERE);
         Clock clock = Clock.systemDefaultZone();
-        try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
+        StoreOptions options = BedmarkApp.options(clock);
+        if (new StoreFolder(folder, options).sealed()) {
+            return BedmarkApp.unlock(folder, passphrase -> Store.open(folder,
+                    options.withPassphrase(Optional.of(passphrase))), clock, samples);
+        }
+        try (Store store = Store.open(folder, options)) {
             return BedmarkApp.open(store, clock, samples, load);
         }
     }

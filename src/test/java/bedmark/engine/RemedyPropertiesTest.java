@@ -39,7 +39,7 @@ class RemedyPropertiesTest {
     void aRemedyThatIsDoneBringsWhatItTold() {
         Random random = new Random(61);
         Map<String, Integer> done = new HashMap<>();
-        for (int i = 0; i < 2_500; i++) {
+        for (int i = 0; i < Zones.MANY; i++) {
             LoadingZone zone = atBoard(Zones.exact(Zones.random(random)));
             Assessment before = Engine.assess(zone, SITE);
             for (Remedy remedy : before.remedies()) {

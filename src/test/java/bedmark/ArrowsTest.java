@@ -30,6 +30,7 @@ class ArrowsTest {
     private static final Map<String, List<String>> MAY_SEE = new TreeMap<>(Map.ofEntries(
             Map.entry("quantity", List.of()),
             Map.entry("words", List.of()),
+            Map.entry("diary", List.of()),
             Map.entry("engine", List.of()),
             Map.entry("document", List.of("quantity")),
             Map.entry("form", List.of("quantity", "document")),
@@ -41,9 +42,9 @@ class ArrowsTest {
             Map.entry("picture", List.of("quantity", "document", "engine", "survey")),
             Map.entry("pack", List.of("quantity", "document", "survey", "json", "journal")),
             Map.entry("screen", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
-                    "index", "picture", "pack", "wording")),
+                    "index", "picture", "pack", "wording", "diary")),
             Map.entry("command", List.of("quantity", "words", "document", "engine", "form", "survey", "json",
-                    "journal", "index", "picture", "pack", "wording"))));
+                    "journal", "index", "picture", "pack", "wording", "diary"))));
 
     @TestFactory
     Stream<DynamicTest> eachPackageSeesOnlyThoseBelowIt() {

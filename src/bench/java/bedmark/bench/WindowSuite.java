@@ -17,16 +17,16 @@ import java.util.stream.Stream;
  * From the start of the virtual machine to a round that can be worked on, in a store of 5,000 surveys, against a bare
  * window with the same flags: each a process of its own with an archive of its own classes, turn by turn.
  */
-final class StartSuite implements Suite {
-    private static final int SURVEYS = Integer.getInteger("bench.start.surveys", 5_000);
-    private static final int TURNS = Integer.getInteger("bench.start.turns", 7);
+final class WindowSuite implements Suite {
+    private static final int SURVEYS = Integer.getInteger("bench.window.surveys", 5_000);
+    private static final int TURNS = Integer.getInteger("bench.window.turns", 7);
     private static final List<String> FLAGS = List.of("-XX:TieredStopAtLevel=1", "-XX:+UseSerialGC",
             "-Dglass.platform=Monocle", "-Dmonocle.platform=Headless", "-Dprism.order=sw",
             "-Dheadless.geometry=1280x800-32", "-Xlog:disable");
 
     @Override
     public String name() {
-        return "start";
+        return "window";
     }
 
     @Override

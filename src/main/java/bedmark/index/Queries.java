@@ -64,9 +64,9 @@ final class Queries {
         }
         return database.rows("select " + SurveyRow.COLUMNS + " from survey s where s.transfer = ? and s.state <> ? "
                 + "and s.inspection = ? and s.finished <= ? and not exists (select 1 from survey r "
-                + "where r.supersedes = s.id and r.state <> ?) order by s.finished desc, s.last_no desc",
+                + "where r.supersedes = s.id and r.state <> ?) order by s.finished desc, s.last_no desc limit ?",
                 SurveyRow::read, transfer, QueueState.OPEN.name(), InspectionStatus.INSPECTED.name(), bound,
-                QueueState.OPEN.name()).stream()
+                QueueState.OPEN.name(), without.size() + 1).stream()
                 .map(row -> row.line().id()).filter(id -> !without.contains(id)).findFirst();
     }
 

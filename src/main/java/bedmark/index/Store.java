@@ -28,10 +28,10 @@ import java.util.function.Consumer;
 import java.util.function.Function;
 
 /**
- * The store of one device, in one folder: {@code journal/} is the truth, {@code photos/} its files, {@code index/} a
- * database that can be thrown away, {@code device.json} the identity. One program at a time. All methods may be
- * called from any thread, interrupted or not; an act is saved on the caller's thread, all else waits for the
- * store's own.
+ * The store of one device, in one folder: {@code journal/} is the truth, {@code photos/} its files and
+ * {@code incoming/} those that are being copied, {@code index/} a database that can be thrown away,
+ * {@code device.json} the identity. One program at a time. All methods may be called from any thread, interrupted or
+ * not; an act is saved on the caller's thread, all else waits for the store's own.
  */
 public final class Store implements AutoCloseable {
     private static final String LOCK = "store.lock";

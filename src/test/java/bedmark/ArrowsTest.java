@@ -41,8 +41,9 @@ class ArrowsTest {
             Map.entry("index", List.of("quantity", "document", "engine", "survey", "json", "journal")),
             Map.entry("picture", List.of("quantity", "document", "engine", "survey")),
             Map.entry("pack", List.of("quantity", "document", "survey", "json", "journal")),
+            Map.entry("photo", List.of("document", "pack")),
             Map.entry("screen", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
-                    "index", "picture", "pack", "wording", "diary")),
+                    "index", "picture", "pack", "photo", "wording", "diary")),
             Map.entry("command", List.of("quantity", "words", "document", "engine", "form", "survey", "json",
                     "journal", "index", "picture", "pack", "wording", "diary"))));
 

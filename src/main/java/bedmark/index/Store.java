@@ -44,7 +44,7 @@ public final class Store implements AutoCloseable {
     private final PhotoShelf shelf;
     private final Ledger ledger;
     private final Pen pen;
-    private final Device device;
+    private volatile Device device;
     private final List<StoreObserver> observers = new CopyOnWriteArrayList<>();
     private final AtomicReference<Optional<OffsetDateTime>> savedAt;
     private final AtomicBoolean closed = new AtomicBoolean();
@@ -151,6 +151,22 @@ public final class Store implements AutoCloseable {
 
     public Device device() {
         return device;
+    }
+
+    /**
+     * Gives the device another name; its identity stays.
+     *
+     * @throws NotSaved where the name is not on the medium; the old one then holds
+     */
+    public void nameDevice(String name) {
+        device = desk.call(() -> {
+            try {
+                return new DeviceFile(folder, options.files()).write(Optional.of(device.id()), name);
+            } catch (IOException e) {
+                throw new NotSaved(Fault.defect("not-saved", e, options.files(), folder,
+                        Long.toString(ledger.last())), ledger.last(), e);
+            }
+        });
     }
 
     /** What opening found and did, and what has been found since. */
@@ -324,6 +340,11 @@ public final class Store implements AutoCloseable {
     /** The packs that left, newest first. */
     public List<Export> exports() {
         return ask(Queries::exports);
+    }
+
+    /** The transfer points that were found in the field and proposed, in that order. */
+    public List<Branch> proposals() {
+        return ask(Queries::proposals);
     }
 
     private <T> T ask(Function<Queries, T> question) {

@@ -37,17 +37,19 @@ class ArrowsTest {
             Map.entry("survey", List.of("quantity", "document", "form", "engine")),
             Map.entry("json", List.of("quantity", "document", "form", "engine", "survey")),
             Map.entry("wording", List.of("quantity", "words", "document", "engine", "form", "survey")),
-            Map.entry("journal", List.of("document", "survey", "json")),
-            Map.entry("index", List.of("quantity", "document", "engine", "survey", "json", "journal")),
+            Map.entry("vault", List.of("document", "json")),
+            Map.entry("journal", List.of("document", "survey", "json", "vault")),
+            Map.entry("index", List.of("quantity", "document", "engine", "survey", "json", "journal",
+                    "vault")),
             Map.entry("picture", List.of("quantity", "document", "engine", "survey")),
             Map.entry("pack", List.of("quantity", "document", "survey", "json", "journal")),
             Map.entry("photo", List.of("document", "pack")),
             Map.entry("office", List.of("quantity", "document", "engine", "form", "survey", "json", "journal", "index",
                     "pack")),
             Map.entry("screen", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
-                    "index", "picture", "pack", "photo", "wording", "diary", "office")),
+                    "index", "picture", "pack", "photo", "vault", "wording", "diary", "office")),
             Map.entry("command", List.of("quantity", "words", "document", "engine", "form", "survey", "json",
-                    "journal", "index", "picture", "pack", "wording", "diary", "office"))));
+                    "journal", "index", "picture", "pack", "vault", "wording", "diary", "office"))));
 
     @TestFactory
     Stream<DynamicTest> eachPackageSeesOnlyThoseBelowIt() {

@@ -19,7 +19,7 @@ import java.util.UUID;
 
 /** Takes entries into the database, one by one or many at once, in the order of the journal. */
 final class Index implements AutoCloseable {
-    static final String FORMAT = "1";
+    static final String FORMAT = "2";
     static final String UNREAD = "?";
     private static final int BATCH = 1000;
     private static final String ENTRY = "insert into entry values (?, ?, ?, ?, ?, ?, ?, ?, ?)";
@@ -159,13 +159,19 @@ final class Index implements AutoCloseable {
             register = Optional.of(taken.register());
             registerRead = true;
             database.batch(LANDMARK, act.code(), entry.sequence());
-        } else if (act instanceof Act.PackExported || act instanceof Act.PointProposed) {
+        } else if (isLandmark(act)) {
             database.batch(LANDMARK, act.code(), entry.sequence());
         } else if (act instanceof Act.WalkStarted started) {
             database.run("merge into walk key (round) values (?, ?, null)", started.round(), entry.sequence());
         } else if (act instanceof Act.WalkFinished finished) {
             database.run("update walk set finished = ? where round = ?", entry.sequence(), finished.round());
         }
+    }
+
+    /** Whether entries of that kind are looked for by what they are. */
+    static boolean isLandmark(Act act) {
+        return act instanceof Act.RegisterTaken || act instanceof Act.PackExported || act instanceof Act.ReceiptNoted
+                || act instanceof Act.BackupMade || act instanceof Act.PointProposed;
     }
 
     /** Makes everything that was taken in last. */

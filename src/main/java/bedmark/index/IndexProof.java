@@ -72,8 +72,7 @@ final class IndexProof {
             return entry.map(read -> {
                 Act act = read.act();
                 long touched = act.about().isPresent() ? 0 : Fold.touched(act).size();
-                boolean marked = act instanceof Act.RegisterTaken || act instanceof Act.PackExported
-                        || act instanceof Act.PointProposed;
+                boolean marked = Index.isLandmark(act);
                 return new Row(at, act.code(), read.at().toString(), read.person(), act.about(), touched,
                         marked ? 1 : 0);
             }).orElse(new Row(at, Index.UNREAD, "", "", Optional.empty(), 0, 0));

@@ -40,7 +40,7 @@ create table touch (
 );
 create index touch_entry on touch (sequence_no);
 
--- Entries that are looked for by what they are: registers and packs.
+-- Entries that are looked for by what they are: registers, packs, receipts, backups.
 create table landmark (
   act varchar(40) not null,
   sequence_no bigint not null,

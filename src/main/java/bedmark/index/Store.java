@@ -399,9 +399,21 @@ public final class Store implements AutoCloseable {
                 .map(entry -> ((Act.ReceiptNoted) entry.act()).receipt()).toList());
     }
 
-    /** The newest backup that was made of this store. */
-    public Optional<Entry> lastBackup() {
-        return index(index -> index.landmarks("backup-made", 1).stream().findFirst());
+    /** How the store does. */
+    public StoreFacts facts() {
+        long last = desk.call(ledger::last);
+        Optional<StoreFacts.Made> backup = index(index -> index.landmarks("backup-made", 1).stream().findFirst())
+                .flatMap(StoreFacts.Made::of);
+        return new StoreFacts(last, savedAt(), backup, free(), sealed());
+    }
+
+    /** Some systems don't know. */
+    private long free() {
+        try {
+            return options.files().usableSpace(folder);
+        } catch (IOException e) {
+            return 0;
+        }
     }
 
     /** The surveys that a query asks for, in the order in which they were opened. */
@@ -456,7 +468,12 @@ public final class Store implements AutoCloseable {
 
     /** The transfer points that were found in the field and proposed, in that order. */
     public List<Branch> proposals() {
-        return ask(Queries::proposals);
+        return proposals(Long.MAX_VALUE);
+    }
+
+    /** As {@link #proposals()}, as of an entry. */
+    public List<Branch> proposals(long asOf) {
+        return ask(queries -> queries.proposals(asOf));
     }
 
     private <T> T ask(Function<Queries, T> question) {

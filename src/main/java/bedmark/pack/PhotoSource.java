@@ -36,7 +36,8 @@ public interface PhotoSource {
                 .filter(Files::isRegularFile).findFirst().map(PhotoSource::file);
     }
 
-    private static Photo file(Path file) {
+    /** A photo that is a file. */
+    static Photo file(Path file) {
         return new Photo() {
             @Override
             public long size() throws IOException {

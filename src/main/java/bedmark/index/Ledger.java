@@ -86,7 +86,8 @@ final class Ledger implements AutoCloseable {
         try {
             database = Optional.of(Database.open(indexFolder));
             index = Optional.of(Index.goOn(database.get(), options.levels(), reader::read));
-        } catch (IndexBroken e) {
+        } catch (IndexBroken | Refused e) {
+            // Nobody else has this store: a database that says it is in use was left so by a damaged file.
             database.ifPresent(Ledger::closeQuietly);
         }
     }
@@ -117,7 +118,7 @@ final class Ledger implements AutoCloseable {
             }
             database = Optional.of(Database.open(indexFolder));
             index = Optional.of(Index.begin(database.get(), options.levels(), reader::read, identity));
-        } catch (IOException | IndexBroken e) {
+        } catch (IOException | IndexBroken | Refused e) {
             database.ifPresent(Ledger::closeQuietly);
             inMemory(identity);
         }

@@ -9,7 +9,7 @@ import java.util.List;
 public final class Benchmarks {
     private static final List<Suite> SUITES =
             List.of(new AssessmentSuite(), new ParallelSuite(), new GrowthSuite(),
-                    new SaveSuite(), new StartSuite());
+                    new SaveSuite(), new StartSuite(), new ExportSuite());
 
     private Benchmarks() {
     }

@@ -36,14 +36,16 @@ class ArrowsTest {
             Map.entry("survey", List.of("quantity", "document", "form", "engine")),
             Map.entry("json", List.of("quantity", "document", "form", "engine", "survey")),
             Map.entry("wording", List.of("quantity", "words", "document", "engine", "form", "survey")),
-            Map.entry("journal", List.of("document", "survey", "json")),
-            Map.entry("index", List.of("quantity", "document", "engine", "survey", "json", "journal")),
+            Map.entry("vault", List.of("document", "json")),
+            Map.entry("journal", List.of("document", "survey", "json", "vault")),
+            Map.entry("index", List.of("quantity", "document", "engine", "survey", "json", "journal",
+                    "vault")),
             Map.entry("picture", List.of("quantity", "document", "engine", "survey")),
             Map.entry("pack", List.of("quantity", "document", "survey", "json", "journal")),
             Map.entry("screen", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
-                    "index", "picture", "pack", "wording")),
+                    "index", "picture", "pack", "vault", "wording")),
             Map.entry("command", List.of("quantity", "words", "document", "engine", "form", "survey", "json",
-                    "journal", "index", "picture", "pack", "wording"))));
+                    "journal", "index", "picture", "pack", "vault", "wording"))));
 
     @TestFactory
     Stream<DynamicTest> eachPackageSeesOnlyThoseBelowIt() {

@@ -12,9 +12,13 @@ import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.QueueState;
 import bedmark.survey.SurveyHistory;
+import bedmark.vault.DataKey;
+import bedmark.vault.Passphrase;
+import bedmark.vault.WrappedKey;
 import java.io.ByteArrayInputStream;
 import java.io.Closeable;
 import java.io.IOException;
+import java.io.InputStream;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.util.List;
@@ -38,6 +42,7 @@ public final class Store implements AutoCloseable {
 
     private final Path folder;
     private final StoreOptions options;
+    private final Optional<DataKey> key;
     private final Closeable lock;
     private final Desk desk;
     private final Desk photoDesk = new Desk("bedmark-photos");
@@ -54,9 +59,10 @@ public final class Store implements AutoCloseable {
         this.options = options;
         this.lock = lock;
         this.desk = desk;
-        this.shelf = new PhotoShelf(folder, options.files());
+        this.key = Keys.of(folder, options.files(), options.passphrase());
+        this.shelf = new PhotoShelf(folder, options.files(), key);
         shelf.open();
-        this.ledger = Ledger.open(folder, options, afresh);
+        this.ledger = Ledger.open(folder, options, key, afresh);
         this.pen = new Pen(desk, ledger);
         try {
             Optional<Entry> newest = ledger.newest();
@@ -74,8 +80,9 @@ public final class Store implements AutoCloseable {
     /**
      * Opens a store, and makes it where the folder is empty or missing.
      *
-     * @throws Refused {@code store-locked} where another program has it open; {@code store-…} where the folder can't
-     *                 be used
+     * @throws Refused {@code store-locked} where another program has it open; {@code store-sealed} where it takes a
+     *                 passphrase and none is given, {@code passphrase-wrong}, {@code passphrase-…}; {@code store-…}
+     *                 where the folder can't be used
      */
     public static Store open(Path folder, StoreOptions options) {
         return open(folder, options, false);
@@ -100,6 +107,7 @@ public final class Store implements AutoCloseable {
             Closeable lock = files.lock(folder.resolve(LOCK))
                     .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
             try {
+                new Sealing(folder, files).settle();
                 return new Store(folder, options, lock, desk, afresh);
             } catch (IOException | RuntimeException e) {
                 lock.close();
@@ -113,14 +121,93 @@ public final class Store implements AutoCloseable {
     /**
      * Proves a store that need not be open, without changing a byte.
      *
-     * @throws Refused {@code store-missing} where the folder holds no store
+     * @param passphrase where the store is sealed
+     * @throws Refused {@code store-missing} where the folder holds no store, {@code sealing-unfinished},
+     *                 {@code store-sealed}, {@code passphrase-…}, {@code work-cancelled}
      */
-    public static StoreCheck check(Path folder, FileLayer files, Progress progress) {
+    public static StoreCheck check(Path folder, FileLayer files, Optional<Passphrase> passphrase, Progress progress) {
         Path home = requireStore(folder, files);
         Database.requireFit(home);
+        if (new Sealing(home, files).underWay()) {
+            throw new Refused(Defect.in(folder.toString(), "sealing-unfinished"));
+        }
         Desk desk = new Desk("bedmark-check");
         try (desk) {
-            return desk.call(() -> StoreProof.ofClosed(home, files, progress));
+            return desk.call(() -> StoreProof.ofClosed(home, files, Keys.look(home, files, passphrase), progress));
+        }
+    }
+
+    /** As the other one, of a store that is not sealed. */
+    public static StoreCheck check(Path folder, FileLayer files, Progress progress) {
+        return check(folder, files, Optional.empty(), progress);
+    }
+
+    /** Whether a folder holds a store that takes a passphrase. */
+    public static boolean sealed(Path folder, FileLayer files) {
+        return new PassphraseFile(folder.toAbsolutePath().normalize(), files).exists();
+    }
+
+    /**
+     * Turns encryption on for a store that is not open; an empty or missing folder becomes a new, sealed store.
+     *
+     * @throws Refused those of {@link #open(Path, StoreOptions)}, {@code store-sealed-already},
+     *                 {@code sealing-no-room}, {@code work-cancelled}; nothing was changed
+     */
+    public static void seal(Path folder, StoreOptions options, Passphrase passphrase) {
+        seal(folder, options, passphrase, WrappedKey.ITERATIONS);
+    }
+
+    static void seal(Path folder, StoreOptions options, Passphrase passphrase, int iterations) {
+        StoreOptions unsealed = options.withPassphrase(Optional.empty());
+        if (!sealed(folder, options.files())) {
+            open(folder, unsealed.withProgress(Progress.NONE)).close();
+        }
+        locked(folder, options, home -> {
+            new Sealing(home, options.files()).run(passphrase, iterations, options.segmentBytes(),
+                    options.progress());
+            return true;
+        });
+    }
+
+    /**
+     * Changes the passphrase of a store that is not open; the old one opens it no longer.
+     *
+     * @throws Refused {@code store-not-sealed}, {@code passphrase-wrong}
+     */
+    public static void changePassphrase(Path folder, StoreOptions options, Passphrase old, Passphrase passphrase) {
+        changePassphrase(folder, options, old, passphrase, WrappedKey.ITERATIONS);
+    }
+
+    static void changePassphrase(Path folder, StoreOptions options, Passphrase old, Passphrase passphrase,
+                                 int iterations) {
+        locked(folder, options, home -> {
+            PassphraseFile file = new PassphraseFile(home, options.files());
+            WrappedKey wrapped = file.read().orElseThrow(() ->
+                    new Refused(Defect.in(folder.toString(), "store-not-sealed")));
+            file.write(WrappedKey.wrap(wrapped.unwrap(old), passphrase, iterations));
+            return true;
+        });
+    }
+
+    /** Work on a store's files while nobody has it open. */
+    @FunctionalInterface
+    interface Work<T> {
+        T run(Path home) throws IOException;
+    }
+
+    /** Does such work under the store's lock, on a thread that is never interrupted. */
+    static <T> T locked(Path folder, StoreOptions options, Work<T> work) {
+        Path home = requireStore(folder, options.files());
+        Desk desk = new Desk("bedmark-work");
+        try (desk) {
+            return desk.call(() -> {
+                try (Closeable lock = options.files().lock(home.resolve(LOCK))
+                        .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")))) {
+                    return work.run(home);
+                } catch (IOException e) {
+                    throw new Refused(Fault.defect("store", e, options.files(), home), e);
+                }
+            });
         }
     }
 
@@ -257,13 +344,29 @@ public final class Store implements AutoCloseable {
     }
 
     /**
-     * Where the file of a photo of a survey lies.
+     * Where the file of a photo of a survey lies; in a sealed store that file is sealed, and only
+     * {@link #readPhoto(Branch)} tells what it holds.
      *
      * @throws Refused {@code photo-missing} where the photo's document names no file of this store
      */
     public Path photoFile(Branch photo) {
         return shelf.file(photo).orElseThrow(() ->
                 new Refused(Defect.in(photo.text("file").orElse(""), "photo-missing")));
+    }
+
+    /**
+     * The photo itself, from its file, sealed or not.
+     *
+     * @throws IOException where the file can't be read, or is sealed and damaged
+     * @throws Refused     {@code photo-missing}
+     */
+    public InputStream readPhoto(Branch photo) throws IOException {
+        return shelf.read(photoFile(photo));
+    }
+
+    /** Whether what lies on disk is sealed. */
+    public boolean sealed() {
+        return key.isPresent();
     }
 
     /** The latest register: {@code plant}, {@code forms}, {@code rounds}. */
@@ -347,7 +450,7 @@ public final class Store implements AutoCloseable {
 
     /** Proves the whole store in the calling thread, while others go on saving. */
     public StoreCheck check(Progress progress) {
-        return StoreProof.ofOpen(folder, options.files(), progress, desk, ledger);
+        return StoreProof.ofOpen(folder, options.files(), key, progress, desk, ledger);
     }
 
     /** Waits for what was begun, closes the index cleanly and gives the lock up. Closing again does nothing. */

@@ -39,6 +39,7 @@ public final class Journal implements AutoCloseable {
     private final FileLayer files;
     private final Path folder;
     private final long segmentBytes;
+    private final Cover cover;
     private final UUID identity;
     private final List<Defect> found;
     private Optional<SegmentWriter> writer;
@@ -48,10 +49,11 @@ public final class Journal implements AutoCloseable {
     private volatile long last;
     private Digest hash;
 
-    private Journal(FileLayer files, Path folder, long segmentBytes, Recovery recovery) {
+    private Journal(FileLayer files, Path folder, long segmentBytes, Cover cover, Recovery recovery) {
         this.files = files;
         this.folder = folder;
         this.segmentBytes = segmentBytes;
+        this.cover = cover;
         this.identity = recovery.journal();
         this.found = List.copyOf(recovery.found());
         this.writer = recovery.writer();
@@ -67,14 +69,22 @@ public final class Journal implements AutoCloseable {
      * Opens a journal, and makes it where the folder is empty or missing.
      *
      * @param segmentBytes the length at which a segment is sealed
+     * @param cover        how payloads lie in it
      * @param mark         the last entry that an index knows; entries up to it are not read again
      * @param replay       takes the entries after the mark, or all of them where the mark does not fit the journal
      * @throws IOException where the folder can't be read, or can't be written though a new journal is to be made
-     * @throws Refused     {@code journal-version-unknown}
+     * @throws Refused     {@code journal-version-unknown}, {@code journal-sealed}
      */
+    public static Journal open(Path folder, FileLayer files, long segmentBytes, Cover cover, Optional<Mark> mark,
+                               Progress progress, Replay replay) throws IOException {
+        return new Journal(files, folder, segmentBytes, cover,
+                new Recovery(files, folder, cover, mark, progress).run(replay));
+    }
+
+    /** As the other one, with payloads as they are. */
     public static Journal open(Path folder, FileLayer files, long segmentBytes, Optional<Mark> mark,
                                Progress progress, Replay replay) throws IOException {
-        return new Journal(files, folder, segmentBytes, new Recovery(files, folder, mark, progress).run(replay));
+        return open(folder, files, segmentBytes, Cover.PLAIN, mark, progress, replay);
     }
 
     /** Tells this journal from every other. */
@@ -106,7 +116,7 @@ public final class Journal implements AutoCloseable {
      */
     public Saved append(OffsetDateTime at, String person, UUID device, Act act) {
         Entry entry = new Entry(last + 1, at, person, device, act);
-        Frame frame = new Frame(Frame.Kind.ENTRY, entry.sequence(), hash, EntryCodec.write(entry));
+        Frame frame = cover.entry(entry.sequence(), hash, EntryCodec.write(entry));
         if (frame.payload().length > Frame.LONGEST_PAYLOAD) {
             throw new Refused(Defect.in("", "entry-too-large", Integer.toString(frame.payload().length),
                     Integer.toString(Frame.LONGEST_PAYLOAD)));
@@ -144,7 +154,7 @@ public final class Journal implements AutoCloseable {
         }
         if (writer.isEmpty()) {
             SegmentHeader.Follows follows = sealed ? SegmentHeader.Follows.SEALED : SegmentHeader.Follows.ABANDONED;
-            SegmentHeader header = new SegmentHeader(follows, identity, nextNumber++, last + 1, hash);
+            SegmentHeader header = new SegmentHeader(cover.form(), follows, identity, nextNumber++, last + 1, hash);
             writer = Optional.of(SegmentWriter.create(files, folder, header));
             sealed = false;
         }

@@ -182,7 +182,8 @@ class DamageTest {
             boolean proved = store.check(Progress.NONE).sound();
             Asked answers = Asked.of(store);
             boolean found = !store.opening().found().isEmpty();
-            assertTrue(answers.equals(asked) || !checked && (found || !proved), where);
+            assertTrue(answers.equals(asked) || !checked && (found || !proved), () -> where + ": sound before "
+                    + checked + ", after " + proved + ", " + store.opening() + "\n" + asked + "\n" + answers);
             assertFalse(kind == Kind.INDEX && proved && !answers.equals(asked), where);
             return !checked;
         }

@@ -201,9 +201,14 @@ public final class Store implements AutoCloseable {
         Desk desk = new Desk("bedmark-work");
         try (desk) {
             return desk.call(() -> {
-                try (Closeable lock = options.files().lock(home.resolve(LOCK))
-                        .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")))) {
-                    return work.run(home);
+                try {
+                    Closeable lock = options.files().lock(home.resolve(LOCK))
+                            .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
+                    try {
+                        return work.run(home);
+                    } finally {
+                        lock.close();
+                    }
                 } catch (IOException e) {
                     throw new Refused(Fault.defect("store", e, options.files(), home), e);
                 }

@@ -282,6 +282,10 @@ final class Ledger implements AutoCloseable {
         return journal().last();
     }
 
+    Journal.Reach reach() {
+        return journal().reach();
+    }
+
     Journal.Extent extent() {
         return journal().extent();
     }

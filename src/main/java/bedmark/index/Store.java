@@ -6,6 +6,7 @@ import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
+import bedmark.journal.Journal;
 import bedmark.journal.NotSaved;
 import bedmark.journal.Progress;
 import bedmark.survey.Act;
@@ -14,13 +15,15 @@ import bedmark.survey.QueueState;
 import bedmark.survey.SurveyHistory;
 import bedmark.vault.DataKey;
 import bedmark.vault.Passphrase;
-import bedmark.vault.WrappedKey;
 import java.io.ByteArrayInputStream;
 import java.io.Closeable;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
+import java.time.temporal.ChronoUnit;
+import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -38,7 +41,7 @@ import java.util.function.Function;
  * not; an act is saved on the caller's thread, all else waits for the store's own.
  */
 public final class Store implements AutoCloseable {
-    private static final String LOCK = "store.lock";
+    static final String LOCK = "store.lock";
 
     private final Path folder;
     private final StoreOptions options;
@@ -142,80 +145,6 @@ public final class Store implements AutoCloseable {
         return check(folder, files, Optional.empty(), progress);
     }
 
-    /** Whether a folder holds a store that takes a passphrase. */
-    public static boolean sealed(Path folder, FileLayer files) {
-        return new PassphraseFile(folder.toAbsolutePath().normalize(), files).exists();
-    }
-
-    /**
-     * Turns encryption on for a store that is not open; an empty or missing folder becomes a new, sealed store.
-     *
-     * @throws Refused those of {@link #open(Path, StoreOptions)}, {@code store-sealed-already},
-     *                 {@code sealing-no-room}, {@code work-cancelled}; nothing was changed
-     */
-    public static void seal(Path folder, StoreOptions options, Passphrase passphrase) {
-        seal(folder, options, passphrase, WrappedKey.ITERATIONS);
-    }
-
-    static void seal(Path folder, StoreOptions options, Passphrase passphrase, int iterations) {
-        StoreOptions unsealed = options.withPassphrase(Optional.empty());
-        if (!sealed(folder, options.files())) {
-            open(folder, unsealed.withProgress(Progress.NONE)).close();
-        }
-        locked(folder, options, home -> {
-            new Sealing(home, options.files()).run(passphrase, iterations, options.segmentBytes(),
-                    options.progress());
-            return true;
-        });
-    }
-
-    /**
-     * Changes the passphrase of a store that is not open; the old one opens it no longer.
-     *
-     * @throws Refused {@code store-not-sealed}, {@code passphrase-wrong}
-     */
-    public static void changePassphrase(Path folder, StoreOptions options, Passphrase old, Passphrase passphrase) {
-        changePassphrase(folder, options, old, passphrase, WrappedKey.ITERATIONS);
-    }
-
-    static void changePassphrase(Path folder, StoreOptions options, Passphrase old, Passphrase passphrase,
-                                 int iterations) {
-        locked(folder, options, home -> {
-            PassphraseFile file = new PassphraseFile(home, options.files());
-            WrappedKey wrapped = file.read().orElseThrow(() ->
-                    new Refused(Defect.in(folder.toString(), "store-not-sealed")));
-            file.write(WrappedKey.wrap(wrapped.unwrap(old), passphrase, iterations));
-            return true;
-        });
-    }
-
-    /** Work on a store's files while nobody has it open. */
-    @FunctionalInterface
-    interface Work<T> {
-        T run(Path home) throws IOException;
-    }
-
-    /** Does such work under the store's lock, on a thread that is never interrupted. */
-    static <T> T locked(Path folder, StoreOptions options, Work<T> work) {
-        Path home = requireStore(folder, options.files());
-        Desk desk = new Desk("bedmark-work");
-        try (desk) {
-            return desk.call(() -> {
-                try {
-                    Closeable lock = options.files().lock(home.resolve(LOCK))
-                            .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
-                    try {
-                        return work.run(home);
-                    } finally {
-                        lock.close();
-                    }
-                } catch (IOException e) {
-                    throw new Refused(Fault.defect("store", e, options.files(), home), e);
-                }
-            });
-        }
-    }
-
     /**
      * Throws the index away and makes it anew from the journal.
      *
@@ -229,7 +158,7 @@ public final class Store implements AutoCloseable {
         }
     }
 
-    private static Path requireStore(Path folder, FileLayer files) {
+    static Path requireStore(Path folder, FileLayer files) {
         Path home = folder.toAbsolutePath().normalize();
         if (!files.exists(home.resolve(Ledger.JOURNAL))) {
             throw new Refused(Defect.in(folder.toString(), "store-missing"));
@@ -348,9 +277,48 @@ public final class Store implements AutoCloseable {
         }
     }
 
+    /** As {@link #keepPhoto(Path)}, from a stream. */
+    Branch keepPhoto(InputStream content, String name) {
+        return keep(() -> shelf.keep(content, name));
+    }
+
+    /**
+     * Copies the whole store to a folder or stick, proves the copy, and notes that it was made. Others go on saving.
+     *
+     * @param chosen the backup gets a folder of its own in it; an earlier one there is brought up to date
+     * @return the backup's folder
+     * @throws Refused {@code backup-…}, {@code work-cancelled}: the store is as it was, and an earlier backup whole
+     */
+    public Path backup(Path chosen, String person, Progress progress) {
+        Path target = Backup.folder(chosen.toAbsolutePath().normalize(), device);
+        Journal.Reach now = desk.call(ledger::reach);
+        BackupList list = new Backup(folder, target, options.files(), progress).make(device,
+                OffsetDateTime.now(options.clock()).truncatedTo(ChronoUnit.SECONDS), now.extent(), now.last(),
+                sealed());
+        append(person, new Act.BackupMade(target.toString(), now.last(), list.sha256()));
+        return target;
+    }
+
+    /**
+     * Takes the surveys of another tablet's backup over; see {@link StoreFolder#restore}.
+     *
+     * @throws Refused {@code backup-…}, {@code restore-other-plant}, {@code store-sealed}, {@code passphrase-wrong},
+     *                 {@code photo-missing}, {@code work-cancelled}
+     */
+    public Restored takeOver(Path backup, Optional<Passphrase> passphrase, String person, Progress progress) {
+        FileLayer files = options.files();
+        try {
+            Path from = Backups.find(backup, files);
+            BackupList list = Backups.prove(from, files, progress);
+            return new HandOver(this, new BackupContent(from, list, files, passphrase), person).run();
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("restore", e, files, backup), e);
+        }
+    }
+
     /**
      * Where the file of a photo of a survey lies; in a sealed store that file is sealed, and only
-     * {@link #readPhoto(Branch)} tells what it holds.
+     * {@link #photo(Branch)} tells what it holds.
      *
      * @throws Refused {@code photo-missing} where the photo's document names no file of this store
      */
@@ -359,14 +327,9 @@ public final class Store implements AutoCloseable {
                 new Refused(Defect.in(photo.text("file").orElse(""), "photo-missing")));
     }
 
-    /**
-     * The photo itself, from its file, sealed or not.
-     *
-     * @throws IOException where the file can't be read, or is sealed and damaged
-     * @throws Refused     {@code photo-missing}
-     */
-    public InputStream readPhoto(Branch photo) throws IOException {
-        return shelf.read(photoFile(photo));
+    /** A photo of a survey; nothing where its document names none that lies in this store. */
+    public Optional<StoredPhoto> photo(Branch photo) {
+        return shelf.file(photo).filter(options.files()::exists).map(file -> new StoredPhoto(shelf, file));
     }
 
     /** Whether what lies on disk is sealed. */
@@ -382,6 +345,45 @@ public final class Store implements AutoCloseable {
     /** A survey as it stands, with every change, read from the journal. */
     public Optional<SurveyHistory> history(UUID survey) {
         return index(index -> index.folded(survey).history());
+    }
+
+    /**
+     * A survey as it stood when a certain entry had been saved; nothing where it was not opened yet.
+     *
+     * @param asOf sequence number of that entry
+     */
+    public Optional<SurveyHistory> history(UUID survey, long asOf) {
+        return index(index -> Histories.fold(survey, index.entriesOf(survey).stream()
+                .filter(placed -> placed.entry().sequence() <= asOf).toList(), new ArrayList<>()).history());
+    }
+
+    /** The register as it was when a certain entry had been saved. */
+    public Optional<Branch> register(long asOf) {
+        return index(index -> index.landmarks("register-taken", Integer.MAX_VALUE).stream()
+                .filter(entry -> entry.sequence() <= asOf).findFirst()
+                .map(entry -> ((Act.RegisterTaken) entry.act()).register()));
+    }
+
+    /**
+     * The entry since which some surveys have been ready to leave: the newest that completed or queued one of them. It
+     * stays the same however often they are exported.
+     */
+    public Optional<Entry> readySince(List<UUID> surveys) {
+        return index(index -> surveys.stream().flatMap(survey -> index.entriesOf(survey).stream())
+                .map(Histories.Placed::entry).filter(entry -> entry.act() instanceof Act.SurveyCompleted
+                        || entry.act() instanceof Act.SurveysQueued || entry.act() instanceof Act.SurveyTaken)
+                .max(Comparator.comparingLong(Entry::sequence)));
+    }
+
+    /** The receipts that were noted, newest first. */
+    public List<Branch> receipts() {
+        return index(index -> index.landmarks("receipt-noted", Integer.MAX_VALUE).stream()
+                .map(entry -> ((Act.ReceiptNoted) entry.act()).receipt()).toList());
+    }
+
+    /** The newest backup that was made of this store. */
+    public Optional<Entry> lastBackup() {
+        return index(index -> index.landmarks("backup-made", 1).stream().findFirst());
     }
 
     /** The surveys that a query asks for, in the order in which they were opened. */

@@ -97,7 +97,7 @@ class SealedStoreTest {
         try (Store store = Store.open(sealed, quick(true))) {
             assertFalse(store.opening().rebuilt(), "the index is kept, sealed too");
             Branch photo = store.history(id(1)).orElseThrow().survey().photos().get(0);
-            try (InputStream content = store.readPhoto(photo)) {
+            try (InputStream content = store.photo(photo).orElseThrow().open()) {
                 assertArrayEquals(StoreScript.PHOTO, content.readAllBytes());
             }
             assertTrue(store.check(Progress.NONE).sound());
@@ -117,14 +117,14 @@ class SealedStoreTest {
         Path plain = folder.resolve("plain");
         walked(plain, false);
         assertEquals("store-not-sealed", refusal(plain, quick(true)));
-        assertFalse(Store.sealed(plain, new QuickLayer()));
+        assertFalse(new StoreFolder(plain, quick(false)).sealed());
     }
 
     @Test
     void aStoreIsSealedWithAllThatItHolds() throws IOException {
         Asked asked = walked(folder, false);
         Files.writeString(folder.resolve("journal/00000001-500.torn"), "left skirt");
-        Store.seal(folder, quick(false), SECRET, FEW);
+        new StoreFolder(folder, quick(false), FEW).seal(SECRET);
         assertEquals(List.of(), readable(folder));
         assertFalse(Files.exists(folder.resolve(Sealing.FILE)));
         assertTrue(Files.exists(folder.resolve("journal/00000001-500.torn.sealed")), "kept, but not readable");
@@ -136,7 +136,7 @@ class SealedStoreTest {
             store.append(PERSON, StoreScript.opened(id(60), "T9"));
         }
         assertEquals("store-sealed-already", assertThrows(Refused.class, () ->
-                Store.seal(folder, quick(false), SECRET, FEW)).defect().code());
+                new StoreFolder(folder, quick(false), FEW).seal(SECRET)).defect().code());
     }
 
     @Test
@@ -147,7 +147,7 @@ class SealedStoreTest {
         bytes[200] ^= 1;
         Files.write(segment, bytes);
         long sound = Store.check(folder, new QuickLayer(), Progress.NONE).entries();
-        Store.seal(folder, quick(false), SECRET, FEW);
+        new StoreFolder(folder, quick(false), FEW).seal(SECRET);
         StoreCheck check = Store.check(folder, new QuickLayer(), Optional.of(SECRET), Progress.NONE);
         assertEquals(sound, check.entries());
         assertFalse(check.chainIntact());
@@ -170,7 +170,7 @@ class SealedStoreTest {
 
     private static void seal(Path home, FileLayer files) {
         try {
-            Store.seal(home, options().withFiles(files).withSegmentBytes(2048), SECRET, FEW);
+            new StoreFolder(home, options().withFiles(files).withSegmentBytes(2048), FEW).seal(SECRET);
         } catch (Refused e) {
             assertTrue(e.defect().code().matches("(store|journal)-(failed|force-failed)"), e.defect().toString());
         }
@@ -188,7 +188,7 @@ class SealedStoreTest {
 
     /** Plain or sealed, but all of it, and nothing of the other. */
     private static void assertWhole(Path home, String where) throws IOException {
-        boolean sealed = Store.sealed(home, new QuickLayer());
+        boolean sealed = new StoreFolder(home, quick(false)).sealed();
         try (Store store = Store.open(home, quick(sealed))) {
             StoreCheck check = store.check(Progress.NONE);
             assertTrue(check.sound(), () -> where + check.defects());
@@ -203,7 +203,7 @@ class SealedStoreTest {
         Path home = folder.resolve("live");
         walked(home, false);
         PowerCutDisk disk = new PowerCutDisk(home);
-        Store.seal(home, options().withFiles(disk).withSegmentBytes(2048), SECRET, FEW);
+        new StoreFolder(home, options().withFiles(disk).withSegmentBytes(2048), FEW).seal(SECRET);
         Random random = new Random(5);
         for (int cut = 0; cut <= disk.operations(); cut += EVERY) {
             for (PowerCutDisk.Fate fate : PowerCutDisk.Fate.values()) {
@@ -219,8 +219,8 @@ class SealedStoreTest {
         walked(folder, true);
         Passphrase fresh = Passphrase.chosen("board and skirt");
         assertEquals("passphrase-wrong", assertThrows(Refused.class, () ->
-                Store.changePassphrase(folder, quick(false), fresh, SECRET, FEW)).defect().code());
-        Store.changePassphrase(folder, quick(false), SECRET, fresh, FEW);
+                new StoreFolder(folder, quick(false), FEW).changePassphrase(fresh, SECRET)).defect().code());
+        new StoreFolder(folder, quick(false), FEW).changePassphrase(SECRET, fresh);
         assertEquals("passphrase-wrong", refusal(folder, quick(true)));
         try (Store store = Store.open(folder, quick(false).withPassphrase(Optional.of(fresh)))) {
             assertTrue(store.check(Progress.NONE).sound());
@@ -233,7 +233,7 @@ class SealedStoreTest {
         walked(home, true);
         Passphrase fresh = Passphrase.chosen("board and skirt");
         PowerCutDisk disk = new PowerCutDisk(home);
-        Store.changePassphrase(home, options().withFiles(disk), SECRET, fresh, FEW);
+        new StoreFolder(home, options().withFiles(disk), FEW).changePassphrase(SECRET, fresh);
         Random random = new Random(5);
         for (int cut = 0; cut <= disk.operations(); cut++) {
             for (PowerCutDisk.Fate fate : PowerCutDisk.Fate.values()) {

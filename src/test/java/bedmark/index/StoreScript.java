@@ -70,7 +70,7 @@ final class StoreScript {
     /** An empty store that is sealed, where that is wanted. */
     static Path home(Path folder, boolean sealed) {
         if (sealed) {
-            Store.seal(folder, options().withFiles(new QuickLayer()), SECRET, FEW);
+            new StoreFolder(folder, options().withFiles(new QuickLayer()), FEW).seal(SECRET);
         }
         return folder;
     }

@@ -35,7 +35,7 @@ class EntryCodecTest {
                 new Act.SurveyCompleted(SURVEY, "", Optional.of(OffsetDateTime.parse("2026-03-01T08:52:10+01:00"))),
                 new Act.SurveysQueued(List.of(SURVEY, OTHER)),
                 new Act.PackExported(List.of(SURVEY), "a.zip", "00ff", "/somewhere"),
-                new Act.ReceiptNoted(List.of(OTHER), SOMETHING));
+                new Act.BackupMade("/stick", 12, "00ff"), new Act.ReceiptNoted(List.of(OTHER), SOMETHING));
     }
 
     @ParameterizedTest

@@ -42,10 +42,11 @@ class ArrowsTest {
                     "vault")),
             Map.entry("picture", List.of("quantity", "document", "engine", "survey")),
             Map.entry("pack", List.of("quantity", "document", "survey", "json", "journal")),
+            Map.entry("dispatch", List.of("document", "engine", "survey", "json", "journal", "index", "pack")),
             Map.entry("screen", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
-                    "index", "picture", "pack", "vault", "wording")),
+                    "index", "picture", "pack", "vault", "dispatch", "wording")),
             Map.entry("command", List.of("quantity", "words", "document", "engine", "form", "survey", "json",
-                    "journal", "index", "picture", "pack", "vault", "wording"))));
+                    "journal", "index", "picture", "pack", "vault", "dispatch", "wording"))));
 
     @TestFactory
     Stream<DynamicTest> eachPackageSeesOnlyThoseBelowIt() {

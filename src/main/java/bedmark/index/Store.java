@@ -381,9 +381,21 @@ public final class Store implements AutoCloseable {
                 .map(entry -> ((Act.ReceiptNoted) entry.act()).receipt()).toList());
     }
 
-    /** The newest backup that was made of this store. */
-    public Optional<Entry> lastBackup() {
-        return index(index -> index.landmarks("backup-made", 1).stream().findFirst());
+    /** How the store does. */
+    public StoreFacts facts() {
+        long last = desk.call(ledger::last);
+        Optional<StoreFacts.Made> backup = index(index -> index.landmarks("backup-made", 1).stream().findFirst())
+                .flatMap(StoreFacts.Made::of);
+        return new StoreFacts(last, savedAt(), backup, free(), sealed());
+    }
+
+    /** Some systems don't know. */
+    private long free() {
+        try {
+            return options.files().usableSpace(folder);
+        } catch (IOException e) {
+            return 0;
+        }
     }
 
     /** The surveys that a query asks for, in the order in which they were opened. */

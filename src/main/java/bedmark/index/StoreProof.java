@@ -18,6 +18,7 @@ import bedmark.survey.Entry;
 import bedmark.vault.DataKey;
 import java.io.IOException;
 import java.nio.file.Path;
+import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -31,13 +32,17 @@ final class StoreProof implements JournalVisitor {
     private final PhotoShelf shelf;
     private final Progress progress;
     private final IndexProof index;
+    private final boolean sealed;
     private final List<Defect> defects = new ArrayList<>();
     private final Set<Branch> photos = new LinkedHashSet<>();
+    private Optional<OffsetDateTime> lastAt = Optional.empty();
+    private Optional<StoreFacts.Made> backup = Optional.empty();
 
     private StoreProof(Path folder, FileLayer files, Optional<DataKey> key, Progress progress,
                        IndexProof.Asker asker) {
         this.files = files;
         this.cover = Cover.of(key);
+        this.sealed = key.isPresent();
         this.shelf = new PhotoShelf(folder, files, key);
         this.progress = progress;
         this.index = new IndexProof(asker);
@@ -89,7 +94,8 @@ final class StoreProof implements JournalVisitor {
             defects.addAll(index.defects());
             long named = provePhotos();
             return new StoreCheck(journal.segments(), journal.entries(), journal.last(), journal.intact(),
-                    journal.torn(), named, equal, defects);
+                    journal.torn(), named, equal, defects, new StoreFacts(journal.last(), lastAt, backup,
+                            files.usableSpace(folder), sealed));
         } catch (IOException e) {
             throw new Refused(Fault.defect("journal", e, files, journalFolder), e);
         }
@@ -100,6 +106,8 @@ final class StoreProof implements JournalVisitor {
         Optional<Entry> entry = decode(sequence, place, payload);
         index.entry(sequence, place, entry);
         entry.ifPresent(read -> {
+            lastAt = Optional.of(read.at());
+            backup = StoreFacts.Made.of(read).or(() -> backup);
             if (read.act() instanceof Act.PhotoAttached attached) {
                 photos.add(attached.photo());
             } else if (read.act() instanceof Act.SurveyTaken taken) {

@@ -36,7 +36,7 @@ public interface PhotoSource {
                 .filter(Files::isRegularFile).findFirst().map(PhotoSource::file);
     }
 
-    /** A photo that lies in a file as it is. */
+    /** A photo that is a file. */
     static Photo file(Path file) {
         return new Photo() {
             @Override

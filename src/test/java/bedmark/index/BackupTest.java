@@ -100,7 +100,7 @@ class BackupTest {
         assertEquals(4, restored.taken().size());
         try (Store store = Store.open(home, quick(sealed)); Store copy = Store.open(other, quick(sealed))) {
             assertNotEquals(store.device().id(), copy.device().id());
-            assertTrue(store.lastBackup().isPresent());
+            assertTrue(store.facts().backup().isPresent());
         }
         try (Store copy = Store.open(other, quick(sealed))) {
             assertEquals(asked, Asked.of(copy));
@@ -282,7 +282,7 @@ class BackupTest {
             assertEquals(Map.of("vanishes", "backup-vanished", "fills up", "backup-disk-full", "is locked",
                     "backup-read-only", "breaks", "backup-failed").get(how), code);
             assertEquals(before, files(home.resolve("journal")));
-            assertTrue(store.lastBackup().isEmpty());
+            assertTrue(store.facts().backup().isEmpty());
             store.append(PERSON, StoreScript.opened(id(9), "T9"));
         }
     }

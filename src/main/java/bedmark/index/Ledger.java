@@ -95,7 +95,8 @@ final class Ledger implements AutoCloseable {
         try {
             database = Optional.of(Database.open(indexFolder, password()));
             index = Optional.of(Index.goOn(database.get(), options.levels(), reader::read));
-        } catch (IndexBroken e) {
+        } catch (IndexBroken | Refused e) {
+            // Nobody else has this store: a database that says it is in use was left so by a damaged file.
             database.ifPresent(Ledger::closeQuietly);
         }
     }
@@ -126,7 +127,7 @@ final class Ledger implements AutoCloseable {
             }
             database = Optional.of(Database.open(indexFolder, password()));
             index = Optional.of(Index.begin(database.get(), options.levels(), reader::read, identity));
-        } catch (IOException | IndexBroken e) {
+        } catch (IOException | IndexBroken | Refused e) {
             database.ifPresent(Ledger::closeQuietly);
             inMemory(identity);
         }
@@ -279,6 +280,10 @@ final class Ledger implements AutoCloseable {
 
     long last() {
         return journal().last();
+    }
+
+    Journal.Reach reach() {
+        return journal().reach();
     }
 
     Journal.Extent extent() {

@@ -307,9 +307,7 @@ public final class Store implements AutoCloseable {
      */
     public Path backup(Path chosen, String person, Progress progress) {
         Path target = Backup.folder(chosen.toAbsolutePath().normalize(), device);
-        record Now(Journal.Extent extent, long last) {
-        }
-        Now now = desk.call(() -> new Now(ledger.extent(), ledger.last()));
+        Journal.Reach now = desk.call(ledger::reach);
         BackupList list = new Backup(folder, target, options.files(), progress).make(device,
                 OffsetDateTime.now(options.clock()).truncatedTo(ChronoUnit.SECONDS), now.extent(), now.last(),
                 sealed());

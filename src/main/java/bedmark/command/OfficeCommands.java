@@ -13,6 +13,7 @@ final class OfficeCommands {
                 .addSubcommand(new OfficeRankCommand(surroundings))
                 .addSubcommand(new OfficeAcceptCommand(surroundings))
                 .addSubcommand(new OfficeActionCommand(surroundings))
-                .addSubcommand(new OfficeSettleCommand(surroundings));
+                .addSubcommand(new OfficeSettleCommand(surroundings))
+                .addSubcommand(new OfficeExportCommand(surroundings));
     }
 }

@@ -15,6 +15,7 @@ import bedmark.journal.FileLayer;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.json.JsonReader;
+import bedmark.office.FlatColumn.FlatRow;
 import bedmark.pack.DeviceKey;
 import bedmark.pack.PackReader;
 import bedmark.pack.ReadPack;
@@ -46,6 +47,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.SortedMap;
+import java.util.TreeMap;
 import java.util.UUID;
 import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.function.Function;
@@ -419,6 +422,39 @@ public final class OfficeStore implements AutoCloseable {
     public List<JudgedZone> history(ZoneId zone) {
         return ask(tables -> judged(tables, Merge.zone(zone, tables.copies(List.of(zone)),
                 minutes(tables).setAside()).results(), copy -> copy.origin().register()));
+    }
+
+    /** The digests of everything that came, by zone, survey and revision. */
+    List<String> contents() {
+        return ask(tables -> tables.copies().stream().map(Copy::digest).toList());
+    }
+
+    /** Contents with what the flat table tells of them, in the order of the digests. */
+    List<FlatRow> rows(List<String> digests) {
+        return ask(tables -> {
+            Map<String, Copy> copies = tables.copiesOf(digests);
+            Map<String, Survey> documents = documents(tables, digests);
+            List<Copy> ordered = digests.stream().map(copies::get).toList();
+            Set<String> counting = new HashSet<>();
+            Merge.zones(tables.copies(ordered.stream().map(Copy::zone).distinct().toList()),
+                    minutes(tables).setAside()).values().forEach(zone -> zone.visits().forEach(copy ->
+                    counting.add(copy.digest())));
+            Map<String, JudgedZone> judged = new HashMap<>();
+            judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
+                    .forEach(one -> judged.put(one.copy().digest(), one));
+            return ordered.stream().map(copy -> new FlatRow(copy, counting.contains(copy.digest()),
+                    documents.get(copy.digest()), judge.register(copy.origin().register()),
+                    Optional.ofNullable(judged.get(copy.digest())))).toList();
+        });
+    }
+
+    /** Every version of every register that a survey was made with, by digest. */
+    SortedMap<String, byte[]> registerVersions() {
+        return ask(tables -> {
+            SortedMap<String, byte[]> versions = new TreeMap<>();
+            tables.registers().forEach(digest -> versions.put(digest, tables.register(digest).orElseThrow()));
+            return versions;
+        });
     }
 
     /** What counts of a zone's surveys. */

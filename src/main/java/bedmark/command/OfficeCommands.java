@@ -14,6 +14,8 @@ final class OfficeCommands {
                 .addSubcommand(new OfficeAcceptCommand(surroundings))
                 .addSubcommand(new OfficeActionCommand(surroundings))
                 .addSubcommand(new OfficeSettleCommand(surroundings))
-                .addSubcommand(new OfficeExportCommand(surroundings));
+                .addSubcommand(new OfficeExportCommand(surroundings))
+                .addSubcommand(new OfficeImportRegisterCommand(surroundings))
+                .addSubcommand(new OfficeExportRegisterCommand(surroundings));
     }
 }

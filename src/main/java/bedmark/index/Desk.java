@@ -24,21 +24,18 @@ public final class Desk implements AutoCloseable {
 
     /** Does work and waits for its result. */
     public <T> T call(Callable<T> work) {
-        return callThen(work, () -> { });
+        FutureTask<T> task = new FutureTask<>(work);
+        begin(task);
+        return await(task);
     }
 
-    /** Does work and waits for its result; what is to follow it is done right after, while the caller goes on. */
-    public <T> T callThen(Callable<T> work, Runnable after) {
-        FutureTask<T> task = new FutureTask<>(work);
+    /** Takes work that nobody waits for; it is done before all that is taken later. */
+    public void begin(Runnable work) {
         try {
-            thread.execute(() -> {
-                task.run();
-                after.run();
-            });
+            thread.execute(work);
         } catch (RejectedExecutionException e) {
             throw new IllegalStateException("the store is closed", e);
         }
-        return await(task);
     }
 
     private static <T> T await(FutureTask<T> task) {

@@ -58,6 +58,8 @@ public final class EntryCodec {
                     .with("sha256", exported.sha256()).with("folder", exported.folder());
         } else if (act instanceof Act.ReceiptNoted noted) {
             return branch.with("surveys", ids(noted.surveys())).with("receipt", noted.receipt());
+        } else if (act instanceof Act.OfficeActed office) {
+            return OfficeDeedCodec.write(office.deed(), branch);
         }
         throw new IllegalStateException("an act without a form on disk: " + act.code());
     }
@@ -93,7 +95,8 @@ public final class EntryCodec {
             case "pack-exported" -> new Act.PackExported(ids(branch), text(branch, "pack"), text(branch, "sha256"),
                     text(branch, "folder"));
             case "receipt-noted" -> new Act.ReceiptNoted(ids(branch), branch(branch, "receipt"));
-            default -> throw new Refused(Defect.at(Pointer.of("act"), "word-unknown", code));
+            default -> new Act.OfficeActed(OfficeDeedCodec.read(code, branch).orElseThrow(() ->
+                    new Refused(Defect.at(Pointer.of("act"), "word-unknown", code))));
         };
     }
 

@@ -266,4 +266,16 @@ public sealed interface Act {
             return "receipt-noted";
         }
     }
+
+    /** The office did something; only an office store's journal holds such acts. */
+    record OfficeActed(OfficeDeed deed) implements Act {
+        public OfficeActed {
+            Objects.requireNonNull(deed);
+        }
+
+        @Override
+        public String code() {
+            return deed.code();
+        }
+    }
 }

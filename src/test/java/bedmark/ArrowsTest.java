@@ -36,17 +36,19 @@ class ArrowsTest {
             Map.entry("form", List.of("quantity", "document")),
             Map.entry("survey", List.of("quantity", "document", "form", "engine")),
             Map.entry("json", List.of("quantity", "document", "form", "engine", "survey")),
-            Map.entry("wording", List.of("quantity", "words", "document", "engine", "form", "survey")),
+            Map.entry("wording", List.of("quantity", "words", "document", "engine", "form", "survey", "picture")),
             Map.entry("journal", List.of("document", "survey", "json")),
             Map.entry("index", List.of("quantity", "document", "engine", "survey", "json", "journal")),
             Map.entry("picture", List.of("quantity", "document", "engine", "survey")),
             Map.entry("pack", List.of("quantity", "document", "survey", "json", "journal")),
             Map.entry("office", List.of("quantity", "document", "engine", "form", "survey", "json", "journal", "index",
                     "pack")),
+            Map.entry("report", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
+                    "index", "picture", "pack", "wording", "office")),
             Map.entry("screen", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
-                    "index", "picture", "pack", "wording", "diary", "office")),
+                    "index", "picture", "pack", "wording", "diary", "office", "report")),
             Map.entry("command", List.of("quantity", "words", "document", "engine", "form", "survey", "json",
-                    "journal", "index", "picture", "pack", "wording", "diary", "office"))));
+                    "journal", "index", "picture", "pack", "wording", "diary", "office", "report"))));
 
     @TestFactory
     Stream<DynamicTest> eachPackageSeesOnlyThoseBelowIt() {
@@ -98,6 +100,13 @@ class ArrowsTest {
         check(noClasses().that().resideOutsideOfPackage("bedmark.json..")
                 .should().dependOnClassesThat(resideInAnyPackage("com.fasterxml..", "com.networknt.."))
                 .because("documents are neutral trees everywhere else"));
+    }
+
+    @Test
+    void onlyTheReportKnowsThePdfLibrary() {
+        check(noClasses().that().resideOutsideOfPackage("bedmark.report..")
+                .should().dependOnClassesThat(resideInAnyPackage("org.apache.pdfbox..", "org.apache.fontbox.."))
+                .because("a page is drawn in one place, so that every one of them is tagged and has its faces"));
     }
 
     @Test

@@ -89,6 +89,18 @@ public final class Faces implements TextMeasure {
         return width * size;
     }
 
+    /** As much of a text as fits, with an ellipsis where it is cut. */
+    public String fitting(String text, Lettering lettering, double room) {
+        if (width(text, lettering.face(), lettering.size()) <= room) {
+            return text;
+        }
+        int end = text.length();
+        while (end > 0 && width(text.substring(0, end) + "…", lettering.face(), lettering.size()) > room) {
+            end = text.offsetByCodePoints(end, -1);
+        }
+        return text.substring(0, end).stripTrailing() + "…";
+    }
+
     @Override
     public Extent of(String text, Face face, double size) {
         return new Extent(width(text, face, size), ASCENT * size, DESCENT * size);

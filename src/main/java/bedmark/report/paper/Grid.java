@@ -37,23 +37,32 @@ public final class Grid {
      * @param strong whether it is what its row is about
      * @param ink    of its text
      * @param sign   drawn ahead of its text
+     * @param below  in the second place, in lines of its own; empty where there is nothing
      */
-    public record Cell(String text, boolean strong, Ink ink, Sign sign) {
+    public record Cell(String text, boolean strong, Ink ink, Sign sign, String below) {
         public static Cell of(String text) {
-            return new Cell(text, false, Ink.INK, Sign.NONE);
+            return new Cell(text, false, Ink.INK, Sign.NONE, "");
         }
 
         public Cell bold() {
-            return new Cell(text, true, ink, sign);
+            return new Cell(text, true, ink, sign, below);
         }
 
         public Cell in(Ink other) {
-            return new Cell(text, strong, other, sign);
+            return new Cell(text, strong, other, sign, below);
         }
 
         public Cell with(Sign other) {
-            return new Cell(text, strong, ink, other);
+            return new Cell(text, strong, ink, other, below);
         }
+
+        public Cell then(String other) {
+            return new Cell(text, strong, ink, sign, other);
+        }
+    }
+
+    /** A line of a cell. */
+    private record Line(String text, Lettering lettering) {
     }
 
     /** Something small that is drawn ahead of a text, and says the same as it. */
@@ -139,10 +148,9 @@ public final class Grid {
     }
 
     private void row(List<Cell> cells) {
-        List<List<String>> broken = new ArrayList<>();
+        List<List<Line>> broken = new ArrayList<>();
         for (int i = 0; i < columns.size(); i++) {
-            Cell cell = cells.get(i);
-            broken.add(flow.broken(cell.text(), style(cell), inner(columns.get(i)) - cell.sign().width()));
+            broken.add(lines(cells.get(i), inner(columns.get(i)) - cells.get(i).sign().width()));
         }
         double height = broken.stream().mapToInt(List::size).max().orElse(1) * lettering.leading() + 2 * PAD;
         if (flow.need(height)) {
@@ -153,26 +161,32 @@ public final class Grid {
         flow.booklet().tags().within("TR", () -> {
             double x = flow.left();
             for (int i = 0; i < columns.size(); i++) {
-                cell(cells.get(i), broken.get(i), columns.get(i), x, i == 0);
+                cell(cells.get(i).sign(), broken.get(i), columns.get(i), x, i == 0);
                 x += width(columns.get(i));
             }
         });
         flow.down(height);
     }
 
-    private Lettering style(Cell cell) {
-        Lettering style = lettering.in(cell.ink());
-        return cell.strong() ? style.bold() : style;
+    private List<Line> lines(Cell cell, double room) {
+        Lettering style = cell.strong() ? lettering.in(cell.ink()).bold() : lettering.in(cell.ink());
+        List<Line> lines = new ArrayList<>();
+        flow.broken(cell.text(), style, room).forEach(text -> lines.add(new Line(text, style)));
+        if (!cell.below().isEmpty()) {
+            flow.broken(cell.below(), head, room).forEach(text -> lines.add(new Line(text, head)));
+        }
+        return lines;
     }
 
-    private void cell(Cell cell, List<String> lines, Column column, double x, boolean rowHead) {
-        Lettering style = style(cell);
-        cell.sign().draw(flow.leaf(), x, flow.y() + PAD);
+    private void cell(Sign sign, List<Line> lines, Column column, double x, boolean rowHead) {
+        sign.draw(flow.leaf(), x, flow.y() + PAD);
         Runnable words = () -> {
             for (int i = 0; i < lines.size(); i++) {
-                double at = column.right() ? x + inner(column) - flow.measured(lines.get(i), style)
-                        : x + cell.sign().width();
-                flow.leaf().write(lines.get(i), style, at, flow.y() + PAD + i * style.leading() + style.rise());
+                Line line = lines.get(i);
+                double at = column.right() ? x + inner(column) - flow.measured(line.text(), line.lettering())
+                        : x + sign.width();
+                flow.leaf().write(line.text(), line.lettering(), at,
+                        flow.y() + PAD + i * lettering.leading() + lettering.rise());
             }
         };
         if (rowHead) {

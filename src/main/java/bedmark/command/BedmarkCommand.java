@@ -40,6 +40,7 @@ public final class BedmarkCommand implements Callable<Integer> {
                 .addSubcommand(new CommandLine(new Group.ReferenceGroup())
                         .addSubcommand(new ReferenceCheckCommand(surroundings))
                         .addSubcommand(new ReferenceWriteCommand(surroundings)))
+                .addSubcommand(OfficeCommands.line(surroundings))
                 .addSubcommand(new CommandLine(new Group.StoreGroup())
                         .addSubcommand(new StoreCheckCommand(surroundings))
                         .addSubcommand(new StoreRebuildCommand(surroundings)))

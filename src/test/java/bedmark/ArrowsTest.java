@@ -36,7 +36,7 @@ class ArrowsTest {
             Map.entry("form", List.of("quantity", "document")),
             Map.entry("survey", List.of("quantity", "document", "form", "engine")),
             Map.entry("json", List.of("quantity", "document", "form", "engine", "survey")),
-            Map.entry("wording", List.of("quantity", "words", "document", "engine", "form", "survey")),
+            Map.entry("wording", List.of("quantity", "words", "document", "engine", "form", "survey", "picture")),
             Map.entry("vault", List.of("document", "json")),
             Map.entry("journal", List.of("document", "survey", "json", "vault")),
             Map.entry("index", List.of("quantity", "document", "engine", "survey", "json", "journal",
@@ -46,7 +46,9 @@ class ArrowsTest {
             Map.entry("dispatch", List.of("document", "engine", "survey", "json", "journal", "index", "pack")),
             Map.entry("photo", List.of("document", "pack")),
             Map.entry("office", List.of("quantity", "document", "engine", "form", "survey", "json", "journal", "index",
-                    "pack"))));
+                    "pack")),
+            Map.entry("report", List.of("quantity", "words", "document", "engine", "form", "survey", "json", "journal",
+                    "index", "picture", "pack", "office", "wording"))));
 
     /** The two that people meet see all of the rooms, but not each other. */
     private static final List<String> FRONTS = List.of("screen", "command");
@@ -106,6 +108,13 @@ class ArrowsTest {
         check(noClasses().that().resideOutsideOfPackage("bedmark.json..")
                 .should().dependOnClassesThat(resideInAnyPackage("com.fasterxml..", "com.networknt.."))
                 .because("documents are neutral trees everywhere else"));
+    }
+
+    @Test
+    void onlyTheReportKnowsThePdfLibrary() {
+        check(noClasses().that().resideOutsideOfPackage("bedmark.report..")
+                .should().dependOnClassesThat(resideInAnyPackage("org.apache.pdfbox..", "org.apache.fontbox.."))
+                .because("a page is drawn in one place, so that every one of them is tagged and has its faces"));
     }
 
     @Test

@@ -37,6 +37,7 @@ import bedmark.survey.Survey;
 import bedmark.wording.Telling;
 import bedmark.wording.Told;
 import bedmark.wording.Wording;
+import bedmark.wording.ZoneSketcher;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
@@ -219,7 +220,7 @@ public final class ZoneView implements Screen {
     }
 
     private ZoneSketch sketch(Branch document) {
-        return new ZoneSketcher(model.setting(), wording).sketch(document,
+        return new ZoneSketcher(model.setting().assessor(), wording).sketch(document,
                 model.outcomeProperty().get().assessment(), activeLine());
     }
 
@@ -300,7 +301,7 @@ public final class ZoneView implements Screen {
             }
             Branch seen = model.previewPull(line, position, quantity(depth));
             pulled = Optional.of(seen);
-            picture.show(new ZoneSketcher(model.setting(), wording).sketch(seen,
+            picture.show(new ZoneSketcher(model.setting().assessor(), wording).sketch(seen,
                     model.outcomeProperty().get().assessment(), Optional.of(line)), snap());
         }
 

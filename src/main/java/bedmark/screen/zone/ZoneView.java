@@ -59,6 +59,7 @@ public final class ZoneView implements Screen {
     private final Wording wording;
     private final Listening listening = new Listening();
     private final FormPane form;
+    private final HistoryPopOver history;
     private final EntryPane entry;
     private final ZonePictureView picture;
     private final VerdictBlock verdict;
@@ -68,6 +69,7 @@ public final class ZoneView implements Screen {
     private final VBox head;
     private final javafx.scene.Node foot;
     private final boolean large;
+    private boolean portrait;
     private Optional<Branch> pulled = Optional.empty();
 
     public ZoneView(Workplace workplace, ZoneModel model, RoundModel round, Navigator navigator, Density density) {
@@ -79,8 +81,9 @@ public final class ZoneView implements Screen {
         this.wording = workplace.wording();
         model.unitsProperty().set(wording.units());
         model.localeProperty().set(wording.words().locale());
-        this.form = new FormPane(model, wording, listening);
-        this.entry = new EntryPane(model, wording, listening);
+        this.form = new FormPane(model, wording, listening, large);
+        this.history = new HistoryPopOver(model, wording);
+        this.entry = new EntryPane(model, wording, listening, this::showHistory);
         this.picture = new ZonePictureView(sketch(model.surveyProperty().get()), density, new BedPull());
         this.verdict = new VerdictBlock(Optional.of(judgedButton()));
         this.head = Heads.head(workplace, listening, tag(), title(), beltButton());
@@ -156,19 +159,15 @@ public final class ZoneView implements Screen {
     private void showRules() {
         model.outcomeProperty().get().assessment().ifPresent(found -> {
             RulesPane rules = new RulesPane(found, wording, model.setting().form(), this::hideRules);
-            result.getChildren().setAll(rules);
-            if (large) {
-                result.getChildren().add(0, form.caution());
-            }
+            result.getChildren().setAll(form.elsewhere());
+            result.getChildren().add(rules);
             VBox.setVgrow(rules, Priority.ALWAYS);
         });
     }
 
     private void hideRules() {
-        result.getChildren().setAll(picture, verdict);
-        if (large) {
-            result.getChildren().add(0, form.caution());
-        }
+        result.getChildren().setAll(form.elsewhere());
+        result.getChildren().addAll(picture, verdict);
     }
 
     private FootBar footBar() {
@@ -200,6 +199,10 @@ public final class ZoneView implements Screen {
     private void focusActive() {
         form.focusActive();
         entry.focusText();
+    }
+
+    private void showHistory() {
+        form.activeBox().ifPresent(box -> history.show(model.active(), box, portrait));
     }
 
     /** Completes this survey and goes on, or stays at the first gap. */
@@ -288,10 +291,10 @@ public final class ZoneView implements Screen {
                     : Quantity.of(BigDecimal.ZERO, Unit.METRE);
             if (phase == Phase.RELEASED) {
                 pulled = Optional.empty();
-                model.pull(line, position, quantity(depth));
+                model.tables().pull(line, position, quantity(depth));
                 return;
             }
-            Branch seen = model.previewPull(line, position, quantity(depth));
+            Branch seen = model.tables().previewPull(line, position, quantity(depth));
             pulled = Optional.of(seen);
             picture.show(new ZoneSketcher(model.setting(), wording).sketch(seen,
                     model.outcomeProperty().get().assessment(), Optional.of(line)), snap());
@@ -331,7 +334,9 @@ public final class ZoneView implements Screen {
     }
 
     @Override
-    public void turned(boolean portrait) {
+    public void turned(boolean upright) {
+        portrait = upright;
+        history.hide();
         body.setLeft(null);
         body.setTop(null);
         body.setCenter(null);
@@ -345,8 +350,6 @@ public final class ZoneView implements Screen {
             body.setCenter(result);
         }
         entry.turned(portrait);
-        result.getChildren().remove(form.caution());
-        form.shrink(large);
         hideRules();
         focusActive();
     }
@@ -358,6 +361,7 @@ public final class ZoneView implements Screen {
 
     @Override
     public void left() {
+        history.hide();
         model.keep();
         listening.end();
     }

@@ -31,6 +31,7 @@ public final class BedmarkCommand implements Callable<Integer> {
         CommandLine line = new CommandLine(new BedmarkCommand(surroundings))
                 .addSubcommand(new OpenCommand(surroundings))
                 .addSubcommand(new AssessCommand(surroundings))
+                .addSubcommand(new SupportCommand(surroundings))
                 .addSubcommand(new CommandLine(new Group.PackGroup())
                         .addSubcommand(new PackVerifyCommand(surroundings))
                         .addSubcommand(new PackMakeCommand(surroundings)))

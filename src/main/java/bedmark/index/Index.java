@@ -159,7 +159,7 @@ final class Index implements AutoCloseable {
             register = Optional.of(taken.register());
             registerRead = true;
             database.batch(LANDMARK, act.code(), entry.sequence());
-        } else if (act instanceof Act.PackExported) {
+        } else if (act instanceof Act.PackExported || act instanceof Act.PointProposed) {
             database.batch(LANDMARK, act.code(), entry.sequence());
         } else if (act instanceof Act.WalkStarted started) {
             database.run("merge into walk key (round) values (?, ?, null)", started.round(), entry.sequence());

@@ -72,7 +72,8 @@ final class IndexProof {
             return entry.map(read -> {
                 Act act = read.act();
                 long touched = act.about().isPresent() ? 0 : Fold.touched(act).size();
-                boolean marked = act instanceof Act.RegisterTaken || act instanceof Act.PackExported;
+                boolean marked = act instanceof Act.RegisterTaken || act instanceof Act.PackExported
+                        || act instanceof Act.PointProposed;
                 return new Row(at, act.code(), read.at().toString(), read.person(), act.about(), touched,
                         marked ? 1 : 0);
             }).orElse(new Row(at, Index.UNREAD, "", "", Optional.empty(), 0, 0));

@@ -13,11 +13,9 @@ import bedmark.journal.Mark;
 import bedmark.journal.Place;
 import bedmark.journal.Replay;
 import bedmark.json.EntryCodec;
-import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import java.io.IOException;
 import java.nio.file.Path;
-import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -234,25 +232,24 @@ final class Ledger implements AutoCloseable {
         }
     }
 
-    /**
-     * Saves an act, if it is possible.
-     *
-     * @throws Refused where it is not; nothing was written
-     */
-    Journal.Saved save(OffsetDateTime at, String person, UUID device, Act act) {
-        Entry candidate = new Entry(journal().last() + 1, at, person, device, act);
-        ask(asked -> {
-            ActRules.requirePossible(asked, candidate);
-            return true;
-        });
-        return journal().append(at, person, device, act);
+    /** Saves an entry that was found possible; the only thing here that is not done on the index's thread. */
+    Journal.Saved save(Entry possible) {
+        return journal().append(possible.at(), possible.person(), possible.device(), possible.act());
     }
 
-    /** Tells the index of an entry that was saved. */
-    void index(Journal.Saved saved) {
+    /**
+     * Tells the index of an entry that was saved, unless it knows it from walking the journal meanwhile.
+     *
+     * @param last whether it is made last now
+     */
+    void index(Journal.Saved saved, boolean last) {
         indexing(asked -> {
-            asked.add(saved.entry(), saved.place());
-            asked.flush();
+            if (asked.mark().filter(mark -> mark.sequence() >= saved.entry().sequence()).isEmpty()) {
+                asked.add(saved.entry(), saved.place());
+            }
+            if (last) {
+                asked.flush();
+            }
         });
     }
 

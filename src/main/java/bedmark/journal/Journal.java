@@ -15,7 +15,8 @@ import java.util.UUID;
 
 /**
  * The append-only truth: an entry is saved when {@link #append} returns, and never changes. Entries are numbered from
- * 1 without a gap and chained by their hashes over all segments. Used by one thread.
+ * 1 without a gap and chained by their hashes over all segments. Appended to by one thread at a time; any thread may
+ * ask how far it is.
  */
 public final class Journal implements AutoCloseable {
 
@@ -41,10 +42,10 @@ public final class Journal implements AutoCloseable {
     private final UUID identity;
     private final List<Defect> found;
     private Optional<SegmentWriter> writer;
-    private Extent extent;
+    private volatile Extent extent;
     private boolean sealed;
     private int nextNumber;
-    private long last;
+    private volatile long last;
     private Digest hash;
 
     private Journal(FileLayer files, Path folder, long segmentBytes, Recovery recovery) {

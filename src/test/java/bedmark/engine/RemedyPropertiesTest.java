@@ -109,7 +109,8 @@ class RemedyPropertiesTest {
         double change = remedy.change().orElse(1);
         double speed = before.get(Result.BELT_SPEED).orElseThrow().value();
         return switch (remedy.code()) {
-            case "free-bed" -> scaled(zone, before.get(Result.BED_SPEED_RATIO).orElseThrow().value());
+            case "free-bed" -> freed(zone, before.get(Result.BED_AREA).orElseThrow().value()
+                    * before.get(Result.BED_SPEED_RATIO).orElseThrow().value());
             case "lower-feed" -> zone.get(Datum.THROUGHPUT).map(flow -> scaled(zone, change)
                     .with(Datum.THROUGHPUT, flow.value() * change, 0)).orElseGet(() -> scaled(zone, change));
             case "faster-belt", "slower-belt" -> scaled(zone, speed / change).with(Datum.BELT_SPEED, change, 0);
@@ -123,6 +124,12 @@ class RemedyPropertiesTest {
     private static LoadingZone scaled(LoadingZone zone, double factor) {
         Section section = section(zone, spacing(zone));
         return levels(zone, level -> section.level(section.area(level).times(factor)));
+    }
+
+    /** At belt speed everywhere the flow has the same area everywhere. */
+    private static LoadingZone freed(LoadingZone zone, double area) {
+        double level = section(zone, spacing(zone)).level(Uncertain.exact(area)).value();
+        return levels(zone, lagging -> Uncertain.exact(level));
     }
 
     private static LoadingZone widened(LoadingZone zone, double spacing) {

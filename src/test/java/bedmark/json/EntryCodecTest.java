@@ -31,6 +31,8 @@ class EntryCodecTest {
                 new Act.AnswerSet(SURVEY, Pointer.parse("/readings/beltSpeed"), Optional.of(SOMETHING)),
                 new Act.AnswerSet(SURVEY, Pointer.parse("/notes"), Optional.empty()),
                 new Act.AnswerUndone(SURVEY, 7), new Act.PhotoAttached(SURVEY, SOMETHING),
+                new Act.PhotoCaptioned(SURVEY, "p1", "left seal"), new Act.PhotoDetached(SURVEY, "p1"),
+                new Act.PointProposed(OTHER, SOMETHING), new Act.PointProposed(OTHER, Branch.EMPTY),
                 new Act.SurveyCompleted(SURVEY, "R. Okafor"),
                 new Act.SurveyCompleted(SURVEY, "", Optional.of(OffsetDateTime.parse("2026-03-01T08:52:10+01:00"))),
                 new Act.SurveysQueued(List.of(SURVEY, OTHER)),

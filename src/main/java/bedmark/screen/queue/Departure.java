@@ -44,8 +44,10 @@ final class Departure {
             documents.add(survey.document().with("assessment",
                     AssessmentWriter.write(judged.get(survey.id()).assessment())));
         }
-        return Bundle.of(id, createdAt, store.device().document(), site.document().with("rounds", rounds()), notice,
-                documents);
+        Branch plant = site.document().with("rounds", rounds());
+        List<Branch> proposals = store.proposals();
+        return Bundle.of(id, createdAt, store.device().document(), proposals.isEmpty() ? plant
+                : plant.with("proposals", new Node.Series(List.copyOf(proposals))), notice, documents);
     }
 
     /** The surveys with those that share a drive with them, so that the drive is judged as on the screen. */

@@ -157,12 +157,19 @@ public final class ZoneView implements Screen {
     }
 
     private void showRules() {
-        model.outcomeProperty().get().assessment().ifPresent(found -> {
-            RulesPane rules = new RulesPane(found, wording, model.setting().form(), this::hideRules);
-            result.getChildren().setAll(form.elsewhere());
-            result.getChildren().add(rules);
-            VBox.setVgrow(rules, Priority.ALWAYS);
-        });
+        model.outcomeProperty().get().assessment().ifPresent(found -> showInstead(new RulesPane(found, wording,
+                model.setting().form(), this::showWorking, this::hideRules)));
+    }
+
+    private void showWorking() {
+        model.outcomeProperty().get().assessment().ifPresent(found -> showInstead(new WorkingPane(model.setting(),
+                new Survey(model.surveyProperty().get()), found, wording, this::showRules)));
+    }
+
+    private void showInstead(Region pane) {
+        result.getChildren().setAll(form.elsewhere());
+        result.getChildren().add(pane);
+        VBox.setVgrow(pane, Priority.ALWAYS);
     }
 
     private void hideRules() {

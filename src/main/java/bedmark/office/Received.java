@@ -1,0 +1,44 @@
+package bedmark.office;
+
+import bedmark.document.Defect;
+import bedmark.survey.merge.Clash;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+
+/** What came of one pack. */
+public sealed interface Received {
+
+    /** The file that came. */
+    Path file();
+
+    /**
+     * It was taken in whole.
+     *
+     * @param pack        its digest
+     * @param device      the tablet's name, or its fingerprint where it has none
+     * @param fingerprint of the key that signed it
+     * @param fresh       surveys that were not here before
+     * @param known       surveys that were here with the same content
+     * @param clashes     what clashes since in the zones that it is about
+     * @param clock       how far the tablet's clock was ahead when the bundle was made (s); 0 where it was not
+     */
+    record Taken(Path file, String pack, String device, String fingerprint, int fresh, int known,
+                 List<Clash> clashes, long clock) implements Received {
+        public Taken {
+            clashes = List.copyOf(clashes);
+        }
+    }
+
+    /** The very same pack was taken in before; nothing was done. */
+    record AlreadyHere(Path file, String pack, String device, String fingerprint) implements Received {
+    }
+
+    /**
+     * It was refused for one reason; nothing was done.
+     *
+     * @param fingerprint of the key that signed it, where the pack itself is sound
+     */
+    record Turned(Path file, Defect why, Optional<String> fingerprint) implements Received {
+    }
+}

@@ -91,6 +91,15 @@ public final class Store implements AutoCloseable {
         return open(folder, options, false);
     }
 
+    /**
+     * Opens a store that is there.
+     *
+     * @throws Refused as {@link #open(Path, StoreOptions)}; {@code store-missing} where the folder holds no store
+     */
+    public static Store openExisting(Path folder, StoreOptions options) {
+        return open(requireStore(folder, options.files()), options);
+    }
+
     private static Store open(Path folder, StoreOptions options, boolean afresh) {
         Path home = folder.toAbsolutePath().normalize();
         Database.requireFit(home);

@@ -11,10 +11,10 @@ import java.util.concurrent.RejectedExecutionException;
  * One thread that does all work of its kind in order and is never interrupted: an interrupted thread closes the files
  * and the database that it is busy with. Whoever waits may be interrupted; the work is done all the same.
  */
-final class Desk implements AutoCloseable {
+public final class Desk implements AutoCloseable {
     private final ExecutorService thread;
 
-    Desk(String name) {
+    public Desk(String name) {
         thread = Executors.newSingleThreadExecutor(work -> {
             Thread one = new Thread(work, name);
             one.setDaemon(true);
@@ -23,14 +23,14 @@ final class Desk implements AutoCloseable {
     }
 
     /** Does work and waits for its result. */
-    <T> T call(Callable<T> work) {
+    public <T> T call(Callable<T> work) {
         FutureTask<T> task = new FutureTask<>(work);
         begin(task);
         return await(task);
     }
 
     /** Takes work that nobody waits for; it is done before all that is taken later. */
-    void begin(Runnable work) {
+    public void begin(Runnable work) {
         try {
             thread.execute(work);
         } catch (RejectedExecutionException e) {

@@ -177,7 +177,7 @@ final class Index implements AutoCloseable {
     /** Whether entries of that kind are looked for by what they are. */
     static boolean isLandmark(Act act) {
         return act instanceof Act.RegisterTaken || act instanceof Act.PackExported || act instanceof Act.ReceiptNoted
-                || act instanceof Act.BackupMade;
+                || act instanceof Act.BackupMade || act instanceof Act.PointProposed;
     }
 
     /** Makes everything that was taken in last. */

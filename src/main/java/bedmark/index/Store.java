@@ -52,7 +52,7 @@ public final class Store implements AutoCloseable {
     private final PhotoShelf shelf;
     private final Ledger ledger;
     private final Pen pen;
-    private final Device device;
+    private volatile Device device;
     private final List<StoreObserver> observers = new CopyOnWriteArrayList<>();
     private final AtomicReference<Optional<OffsetDateTime>> savedAt;
     private final AtomicBoolean closed = new AtomicBoolean();
@@ -89,6 +89,15 @@ public final class Store implements AutoCloseable {
      */
     public static Store open(Path folder, StoreOptions options) {
         return open(folder, options, false);
+    }
+
+    /**
+     * Opens a store that is there.
+     *
+     * @throws Refused as {@link #open(Path, StoreOptions)}; {@code store-missing} where the folder holds no store
+     */
+    public static Store openExisting(Path folder, StoreOptions options) {
+        return open(requireStore(folder, options.files()), options);
     }
 
     private static Store open(Path folder, StoreOptions options, boolean afresh) {
@@ -172,6 +181,22 @@ public final class Store implements AutoCloseable {
 
     public Device device() {
         return device;
+    }
+
+    /**
+     * Gives the device another name; its identity stays.
+     *
+     * @throws NotSaved where the name is not on the medium; the old one then holds
+     */
+    public void nameDevice(String name) {
+        device = desk.call(() -> {
+            try {
+                return new DeviceFile(folder, options.files()).write(Optional.of(device.id()), name);
+            } catch (IOException e) {
+                throw new NotSaved(Fault.defect("not-saved", e, options.files(), folder,
+                        Long.toString(ledger.last())), ledger.last(), e);
+            }
+        });
     }
 
     /** What opening found and did, and what has been found since. */
@@ -446,6 +471,16 @@ public final class Store implements AutoCloseable {
     /** The packs that left, newest first. */
     public List<Export> exports() {
         return ask(Queries::exports);
+    }
+
+    /** The transfer points that were found in the field and proposed, in that order. */
+    public List<Branch> proposals() {
+        return proposals(Long.MAX_VALUE);
+    }
+
+    /** As {@link #proposals()}, as of an entry. */
+    public List<Branch> proposals(long asOf) {
+        return ask(queries -> queries.proposals(asOf));
     }
 
     private <T> T ask(Function<Queries, T> question) {

@@ -48,6 +48,12 @@ public final class StoreFolder {
         }
         locked(() -> new Sealing(folder, files).run(passphrase, iterations, options.segmentBytes(),
                 options.progress()));
+        index(Optional.of(passphrase));
+    }
+
+    /** Makes the index at once, so that a proof finds everything in its place. */
+    private void index(Optional<Passphrase> passphrase) {
+        Store.open(folder, options.withPassphrase(passphrase).withProgress(Progress.NONE)).close();
     }
 
     /**
@@ -76,8 +82,10 @@ public final class StoreFolder {
         Database.requireFit(folder);
         try {
             if (Restoring.isFree(folder)) {
-                return new Restoring(Backups.find(backup, files), folder, options).run(passphrase,
-                        options.progress());
+                Restored restored = new Restoring(Backups.find(backup, files), folder, options)
+                        .run(passphrase, options.progress());
+                index(sealed() ? passphrase : Optional.empty());
+                return restored;
             }
         } catch (IOException e) {
             throw new Refused(Fault.defect("restore", e, files, folder.getParent()), e);
@@ -85,6 +93,19 @@ public final class StoreFolder {
         Store.requireStore(folder, files);
         try (Store store = Store.open(folder, options.withProgress(Progress.NONE))) {
             return store.takeOver(backup, passphrase, person, options.progress());
+        }
+    }
+
+    /**
+     * Whether a backup was made of a store that takes a passphrase.
+     *
+     * @throws Refused {@code backup-absent}, {@code backup-several}, {@code backup-list-damaged}
+     */
+    public boolean takesPassphrase(Path backup) {
+        try {
+            return BackupList.read(Backups.find(backup, files), files).filter(BackupList::sealed).isPresent();
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("restore", e, files, backup), e);
         }
     }
 

@@ -68,7 +68,13 @@ public final class Departure {
                     AssessmentWriter.write(judged.get(survey.id()).assessment())));
         }
         OffsetDateTime at = ready.at().truncatedTo(ChronoUnit.SECONDS);
-        return named(at, store.device().document(), site.with("rounds", rounds(site, rounds)), notice, documents);
+        return named(at, store.device().document(), plant(site.with("rounds", rounds(site, rounds)), asOf), notice,
+                documents);
+    }
+
+    private Branch plant(Branch register, long asOf) {
+        List<Branch> proposals = store.proposals(asOf);
+        return proposals.isEmpty() ? register : register.with("proposals", new Node.Series(List.copyOf(proposals)));
     }
 
     private Survey finished(UUID id, long asOf) {

@@ -14,12 +14,10 @@ import bedmark.journal.Mark;
 import bedmark.journal.Place;
 import bedmark.journal.Replay;
 import bedmark.json.EntryCodec;
-import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.vault.DataKey;
 import java.io.IOException;
 import java.nio.file.Path;
-import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -97,7 +95,8 @@ final class Ledger implements AutoCloseable {
         try {
             database = Optional.of(Database.open(indexFolder, password()));
             index = Optional.of(Index.goOn(database.get(), options.levels(), reader::read));
-        } catch (IndexBroken e) {
+        } catch (IndexBroken | Refused e) {
+            // Nobody else has this store: a database that says it is in use was left so by a damaged file.
             database.ifPresent(Ledger::closeQuietly);
         }
     }
@@ -128,7 +127,7 @@ final class Ledger implements AutoCloseable {
             }
             database = Optional.of(Database.open(indexFolder, password()));
             index = Optional.of(Index.begin(database.get(), options.levels(), reader::read, identity));
-        } catch (IOException | IndexBroken e) {
+        } catch (IOException | IndexBroken | Refused e) {
             database.ifPresent(Ledger::closeQuietly);
             inMemory(identity);
         }
@@ -243,25 +242,24 @@ final class Ledger implements AutoCloseable {
         }
     }
 
-    /**
-     * Saves an act, if it is possible.
-     *
-     * @throws Refused where it is not; nothing was written
-     */
-    Journal.Saved save(OffsetDateTime at, String person, UUID device, Act act) {
-        Entry candidate = new Entry(journal().last() + 1, at, person, device, act);
-        ask(asked -> {
-            ActRules.requirePossible(asked, candidate);
-            return true;
-        });
-        return journal().append(at, person, device, act);
+    /** Saves an entry that was found possible; the only thing here that is not done on the index's thread. */
+    Journal.Saved save(Entry possible) {
+        return journal().append(possible.at(), possible.person(), possible.device(), possible.act());
     }
 
-    /** Tells the index of an entry that was saved. */
-    void index(Journal.Saved saved) {
+    /**
+     * Tells the index of an entry that was saved, unless it knows it from walking the journal meanwhile.
+     *
+     * @param last whether it is made last now
+     */
+    void index(Journal.Saved saved, boolean last) {
         indexing(asked -> {
-            asked.add(saved.entry(), saved.place());
-            asked.flush();
+            if (asked.mark().filter(mark -> mark.sequence() >= saved.entry().sequence()).isEmpty()) {
+                asked.add(saved.entry(), saved.place());
+            }
+            if (last) {
+                asked.flush();
+            }
         });
     }
 
@@ -282,6 +280,10 @@ final class Ledger implements AutoCloseable {
 
     long last() {
         return journal().last();
+    }
+
+    Journal.Reach reach() {
+        return journal().reach();
     }
 
     Journal.Extent extent() {

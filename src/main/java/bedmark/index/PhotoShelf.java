@@ -25,6 +25,8 @@ import java.util.regex.Pattern;
  */
 final class PhotoShelf {
     static final String FOLDER = "photos";
+    /** What is not yet a photo lies apart, so that opening need not look through the photos of many years. */
+    static final String INCOMING = "incoming";
     /** What the names of sealed files end with. */
     static final String SEALED = ".sealed";
     private static final Pattern FILE = Pattern.compile("photos/[0-9a-f]{64}\\.(jpg|png)");
@@ -35,12 +37,14 @@ final class PhotoShelf {
 
     private final Path store;
     private final Path folder;
+    private final Path incoming;
     private final FileLayer files;
     private final Optional<DataKey> key;
 
     PhotoShelf(Path store, FileLayer files, Optional<DataKey> key) {
         this.store = store;
         this.folder = store.resolve(FOLDER);
+        this.incoming = store.resolve(INCOMING);
         this.files = files;
         this.key = key;
     }
@@ -49,13 +53,12 @@ final class PhotoShelf {
         return folder;
     }
 
-    /** Makes the folder and drops what never came to be a photo. */
+    /** Makes the folders and drops what never came to be a photo. */
     void open() throws IOException {
         files.createFolder(folder);
-        for (Path file : files.list(folder)) {
-            if (file.getFileName().toString().endsWith(PART)) {
-                files.delete(file);
-            }
+        files.createFolder(incoming);
+        for (Path file : files.list(incoming)) {
+            files.delete(file);
         }
     }
 
@@ -112,7 +115,7 @@ final class PhotoShelf {
         byte[] chunk = new byte[CHUNK];
         int count = read(source, chunk);
         String ending = ending(chunk, count).orElseThrow(() -> new Refused(Defect.in(name, "photo-unfit")));
-        Path part = folder.resolve(UUID.randomUUID() + PART);
+        Path part = incoming.resolve(UUID.randomUUID() + PART);
         try {
             return place(part, ending, copy(source, chunk, count, part));
         } catch (IOException e) {

@@ -35,9 +35,10 @@ import java.util.function.Consumer;
 import java.util.function.Function;
 
 /**
- * The store of one device, in one folder: {@code journal/} is the truth, {@code photos/} its files, {@code index/} a
- * database that can be thrown away, {@code device.json} the identity. One program at a time. All methods may be
- * called from any thread, interrupted or not; they wait for the store's own thread.
+ * The store of one device, in one folder: {@code journal/} is the truth, {@code photos/} its files and
+ * {@code incoming/} those that are being copied, {@code index/} a database that can be thrown away,
+ * {@code device.json} the identity. One program at a time. All methods may be called from any thread, interrupted or
+ * not; an act is saved on the caller's thread, all else waits for the store's own.
  */
 public final class Store implements AutoCloseable {
     static final String LOCK = "store.lock";
@@ -50,7 +51,8 @@ public final class Store implements AutoCloseable {
     private final Desk photoDesk = new Desk("bedmark-photos");
     private final PhotoShelf shelf;
     private final Ledger ledger;
-    private final Device device;
+    private final Pen pen;
+    private volatile Device device;
     private final List<StoreObserver> observers = new CopyOnWriteArrayList<>();
     private final AtomicReference<Optional<OffsetDateTime>> savedAt;
     private final AtomicBoolean closed = new AtomicBoolean();
@@ -64,6 +66,7 @@ public final class Store implements AutoCloseable {
         this.shelf = new PhotoShelf(folder, options.files(), key);
         shelf.open();
         this.ledger = Ledger.open(folder, options, key, afresh);
+        this.pen = new Pen(desk, ledger);
         try {
             Optional<Entry> newest = ledger.newest();
             this.savedAt = new AtomicReference<>(newest.map(Entry::at));
@@ -180,6 +183,22 @@ public final class Store implements AutoCloseable {
         return device;
     }
 
+    /**
+     * Gives the device another name; its identity stays.
+     *
+     * @throws NotSaved where the name is not on the medium; the old one then holds
+     */
+    public void nameDevice(String name) {
+        device = desk.call(() -> {
+            try {
+                return new DeviceFile(folder, options.files()).write(Optional.of(device.id()), name);
+            } catch (IOException e) {
+                throw new NotSaved(Fault.defect("not-saved", e, options.files(), folder,
+                        Long.toString(ledger.last())), ledger.last(), e);
+            }
+        });
+    }
+
     /** What opening found and did, and what has been found since. */
     public Opening opening() {
         return desk.call(ledger::opening);
@@ -199,14 +218,9 @@ public final class Store implements AutoCloseable {
         if (act instanceof Act.PhotoAttached attached && !options.files().exists(photoFile(attached.photo()))) {
             throw new Refused(Defect.in(attached.photo().text("file").orElse(""), "photo-missing"));
         }
-        AtomicReference<Optional<Journal.Saved>> saved = new AtomicReference<>(Optional.empty());
         try {
-            Entry entry = desk.callThen(() -> {
-                Journal.Saved done = ledger.save(OffsetDateTime.now(options.clock()), person, device.id(), act);
-                savedAt.set(Optional.of(OffsetDateTime.now(options.clock())));
-                saved.set(Optional.of(done));
-                return done.entry();
-            }, () -> saved.get().ifPresent(ledger::index));
+            Entry entry = pen.save(OffsetDateTime.now(options.clock()), person, device.id(), act);
+            savedAt.set(Optional.of(OffsetDateTime.now(options.clock())));
             tell(observer -> observer.saved(entry));
             return entry;
         } catch (NotSaved e) {
@@ -302,9 +316,7 @@ public final class Store implements AutoCloseable {
      */
     public Path backup(Path chosen, String person, Progress progress) {
         Path target = Backup.folder(chosen.toAbsolutePath().normalize(), device);
-        record Now(Journal.Extent extent, long last) {
-        }
-        Now now = desk.call(() -> new Now(ledger.extent(), ledger.last()));
+        Journal.Reach now = desk.call(ledger::reach);
         BackupList list = new Backup(folder, target, options.files(), progress).make(device,
                 OffsetDateTime.now(options.clock()).truncatedTo(ChronoUnit.SECONDS), now.extent(), now.last(),
                 sealed());
@@ -461,6 +473,16 @@ public final class Store implements AutoCloseable {
         return ask(Queries::exports);
     }
 
+    /** The transfer points that were found in the field and proposed, in that order. */
+    public List<Branch> proposals() {
+        return proposals(Long.MAX_VALUE);
+    }
+
+    /** As {@link #proposals()}, as of an entry. */
+    public List<Branch> proposals(long asOf) {
+        return ask(queries -> queries.proposals(asOf));
+    }
+
     private <T> T ask(Function<Queries, T> question) {
         return index(index -> question.apply(new Queries(index)));
     }
@@ -491,6 +513,7 @@ public final class Store implements AutoCloseable {
         if (closed.getAndSet(true)) {
             return;
         }
+        pen.close();
         photoDesk.call(() -> true);
         photoDesk.close();
         desk.call(() -> {

@@ -1,5 +1,6 @@
 package bedmark.screen;
 
+import bedmark.diary.Diary;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
 import bedmark.screen.start.UnlockModel;
@@ -38,11 +39,12 @@ public final class BedmarkApp extends Application {
      * @param store   opened already; nothing where it takes a passphrase
      * @param folder  the store's
      * @param opening opens it with one
+     * @param diary   takes what fails
      * @param samples the folder with the demo plant
      * @param load    whether to load it at once
      */
-    private record Launch(Optional<Store> store, Path folder, Function<Passphrase, Store> opening, Clock clock,
-                          Optional<Path> samples, boolean load) {
+    private record Launch(Optional<Store> store, Path folder, Function<Passphrase, Store> opening, Diary diary,
+                          Clock clock, Optional<Path> samples, boolean load) {
     }
 
     /** The options that the app opens a store with. */
@@ -56,8 +58,9 @@ public final class BedmarkApp extends Application {
      *
      * @return false where there is no display to open a window on
      */
-    public static boolean open(Store store, Clock clock, Optional<Path> samples, boolean load) {
-        return launch(new Launch(Optional.of(store), store.folder(), passphrase -> store, clock, samples, load));
+    public static boolean open(Store store, Diary diary, Clock clock, Optional<Path> samples, boolean load) {
+        return launch(new Launch(Optional.of(store), store.folder(), passphrase -> store, diary, clock, samples,
+                load));
     }
 
     /**
@@ -66,9 +69,9 @@ public final class BedmarkApp extends Application {
      * @param opening opens the store, or refuses
      * @return false where there is no display to open a window on
      */
-    public static boolean unlock(Path folder, Function<Passphrase, Store> opening, Clock clock,
+    public static boolean unlock(Path folder, Function<Passphrase, Store> opening, Diary diary, Clock clock,
                                  Optional<Path> samples) {
-        return launch(new Launch(Optional.empty(), folder, opening, clock, samples, false));
+        return launch(new Launch(Optional.empty(), folder, opening, diary, clock, samples, false));
     }
 
     private static boolean launch(Launch begin) {
@@ -107,7 +110,10 @@ public final class BedmarkApp extends Application {
         workplace = Optional.of(here);
         shell = Optional.of(opened);
         // Whatever goes wrong on the screen: what was typed is saved first, and the person goes on.
-        Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> opened.failed(failure));
+        Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> {
+            given.diary().note(failure);
+            opened.failed(failure);
+        });
         stage.setScene(opened.scene());
         if (given.load()) {
             opened.loadDemo();

@@ -102,12 +102,18 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
             return undone(undone.undone());
         }
         if (act instanceof Act.PhotoAttached attached) {
-            requireOpen();
-            List<Node> photos = new ArrayList<>(survey.document().series("photos"));
+            List<Branch> photos = new ArrayList<>(survey.photos());
             photos.add(attached.photo());
-            Node.Series longer = new Node.Series(photos);
-            return new SurveyHistory(base.with("photos", longer), new Survey(survey.document().with("photos", longer)),
-                    state, changes);
+            return withPhotos(photos);
+        }
+        if (act instanceof Act.PhotoCaptioned captioned) {
+            return withPhotos(survey.photos().stream().map(photo -> !isPhoto(photo, captioned.photo()) ? photo
+                    : captioned.caption().isBlank() ? photo.without("caption")
+                    : photo.with("caption", captioned.caption())).toList(), captioned.photo());
+        }
+        if (act instanceof Act.PhotoDetached detached) {
+            return withPhotos(survey.photos().stream().filter(photo -> !isPhoto(photo, detached.photo())).toList(),
+                    detached.photo());
         }
         if (act instanceof Act.SurveyCompleted completed) {
             Branch finished = survey.document().with("completedAt",
@@ -126,6 +132,25 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
             return moved(QueueState.RECEIVED);
         }
         return this;
+    }
+
+    private static boolean isPhoto(Branch photo, String id) {
+        return photo.text("id").equals(Optional.of(id));
+    }
+
+    private SurveyHistory withPhotos(List<Branch> photos, String changed) {
+        if (survey.photos().stream().noneMatch(photo -> isPhoto(photo, changed))) {
+            throw new IllegalStateException("photo " + changed + " is not attached");
+        }
+        return withPhotos(photos);
+    }
+
+    /** Photos belong to what undoing an answer starts from, so that it takes none away. */
+    private SurveyHistory withPhotos(List<Branch> photos) {
+        requireOpen();
+        Node.Series series = new Node.Series(List.copyOf(photos));
+        return new SurveyHistory(base.with("photos", series), new Survey(survey.document().with("photos", series)),
+                state, changes);
     }
 
     private SurveyHistory answered(Entry entry, Act.AnswerSet set) {

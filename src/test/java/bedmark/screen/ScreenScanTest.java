@@ -89,6 +89,9 @@ class ScreenScanTest {
             scan("depth", true);
             app.click("every-rule");
             scan("rules", true);
+            app.click("every-rule");
+            app.click("show-working");
+            scan("working", true);
             app.click("slot-readings-seals-0-type");
             scan("seals", true);
             app.click("foot-round");

@@ -8,7 +8,6 @@ import bedmark.engine.Datum;
 import bedmark.engine.LoadingZone;
 import bedmark.engine.Result;
 import bedmark.engine.bed.DepthPoint;
-import bedmark.engine.seal.SealSegment;
 import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Reading;
 import bedmark.engine.verdict.AllowedDepth;
@@ -147,12 +146,12 @@ public final class ZoneSketcher {
                 length.isPresent() ? wording.computed(length.getAsDouble(), metres)
                         : wording.text("screen.picture.length-unknown"),
                 allowed.map(limit -> small(limit.overloaded().orElseThrow())).orElse(""),
-                wording.text("screen.picture.allowed"),
+                allowed.map(limit -> wording.text("zone.limit." + limit.rule().code())).orElse(""),
                 times -> wording.text("screen.picture.heights", wording.format().exact(
                         new BigDecimal(times, new MathContext(2)).stripTrailingZeros())),
                 stations.isEmpty() ? Optional.of(wording.text("screen.picture.prompt")) : Optional.empty(),
                 spacing.isPresent() ? small(spacing.getAsDouble()) : wording.text("screen.picture.width-unknown"),
-                sectionTitle(stations), seals(zone.seals()));
+                sectionTitle(stations), new SectionNote(wording, this::small).of(zone, shownAt(stations)));
     }
 
     private String sectionTitle(List<ZoneSketch.Station> stations) {
@@ -161,15 +160,10 @@ public final class ZoneSketcher {
                 : "";
     }
 
-    /** The seals in a few words: the defects, else that they are sound. */
-    private String seals(List<SealSegment> seals) {
-        if (seals.isEmpty()) {
-            return wording.text("screen.picture.seals-unknown");
-        }
-        List<String> defects = seals.stream().filter(segment -> segment.condition().isDefect())
-                .map(segment -> wording.text("screen.seal." + segment.condition().code())).distinct().toList();
-        return defects.isEmpty() ? wording.text("screen.picture.seals-sound")
-                : wording.text("screen.picture.seals", String.join(", ", defects));
+    /** Where the zone is cut across. */
+    private static double shownAt(List<ZoneSketch.Station> stations) {
+        OptionalInt shown = ZoneSketch.shown(stations);
+        return shown.isPresent() ? stations.get(shown.getAsInt()).position() : 0;
     }
 
     /** A depth or width as a bare number of the small unit; the picture's captions share one unit. */

@@ -426,8 +426,9 @@ public final class ZoneModel {
         Branch now = read.answer().map(answer -> Answers.change(document(), active().where(), Optional.of(answer))
                 .in(document())).orElseGet(this::document);
         if (!Objects.equals(survey.get(), now)) {
-            survey.set(now);
+            // Who draws the survey looks at what it comes to as well.
             outcome.set(judge(now));
+            survey.set(now);
         }
     }
 

@@ -16,6 +16,7 @@ final class OfficeCommands {
                 .addSubcommand(new OfficeSettleCommand(surroundings))
                 .addSubcommand(new OfficeExportCommand(surroundings))
                 .addSubcommand(new OfficeImportRegisterCommand(surroundings))
-                .addSubcommand(new OfficeExportRegisterCommand(surroundings));
+                .addSubcommand(new OfficeExportRegisterCommand(surroundings))
+                .addSubcommand(new OfficeRoundCommand(surroundings));
     }
 }

@@ -11,6 +11,8 @@ final class OfficeCommands {
         return new CommandLine(new Group.OfficeGroup())
                 .addSubcommand(new OfficeReceiveCommand(surroundings))
                 .addSubcommand(new OfficeRankCommand(surroundings))
+                .addSubcommand(new OfficeTrendCommand(surroundings))
+                .addSubcommand(new OfficeEnergyCommand(surroundings))
                 .addSubcommand(new OfficeAcceptCommand(surroundings))
                 .addSubcommand(new OfficeActionCommand(surroundings))
                 .addSubcommand(new OfficeSettleCommand(surroundings))

@@ -14,6 +14,7 @@ final class OfficeCommands {
                 .addSubcommand(new OfficeAcceptCommand(surroundings))
                 .addSubcommand(new OfficeActionCommand(surroundings))
                 .addSubcommand(new OfficeSettleCommand(surroundings))
-                .addSubcommand(new OfficeExportCommand(surroundings));
+                .addSubcommand(new OfficeExportCommand(surroundings))
+                .addSubcommand(new OfficeReportCommand(surroundings));
     }
 }

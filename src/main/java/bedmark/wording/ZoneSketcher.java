@@ -101,7 +101,7 @@ public final class ZoneSketcher {
         return stations;
     }
 
-    /** The line of the table that each station of {@link #stations} stands for. */
+    /** The line of the table that each station of the sketch stands for. */
     public static List<Integer> lines(Branch document) {
         List<Integer> lines = new ArrayList<>();
         List<Node> rows = document.at(Survey.READINGS.child("bedDepths"))

@@ -67,6 +67,11 @@ final class PhotoShelf {
         return photo.text("file").filter(name -> FILE.matcher(name).matches()).map(this::onDisk);
     }
 
+    /** Whether a photo's document names a file of a shelf at all; a survey from elsewhere may name others. */
+    static boolean isShelved(Branch photo) {
+        return photo.text("file").filter(name -> FILE.matcher(name).matches()).isPresent();
+    }
+
     private Path onDisk(String name) {
         return store.resolve(key.isPresent() ? name + SEALED : name);
     }

@@ -14,6 +14,7 @@ public final class Benchmarks {
                     new GrowthSuite(),
                     new SaveSuite(),
                     new StartSuite(),
+                    new ExportSuite(),
                     new WindowSuite());
 
     private Benchmarks() {

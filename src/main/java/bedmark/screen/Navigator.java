@@ -15,6 +15,13 @@ public interface Navigator {
     /** To a transfer point; its survey is begun where there is none. */
     void toZone(RoundModel round, RoundRow row);
 
+    /**
+     * To the store's own screen.
+     *
+     * @param back the way back from there
+     */
+    void toStore(Runnable back);
+
     /** To the queue and the export. */
     void toQueue(RoundModel round);
 }

@@ -7,6 +7,8 @@ import bedmark.screen.round.RoundRow;
 import bedmark.screen.round.RoundView;
 import bedmark.screen.start.StartModel;
 import bedmark.screen.start.StartView;
+import bedmark.screen.store.StoreModel;
+import bedmark.screen.store.StoreView;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Hand;
 import bedmark.screen.theme.Light;
@@ -150,6 +152,12 @@ public final class Shell implements Navigator {
                     workplace.clock()), workplace.preferences().units(), workplace.preferences().locale());
             show(() -> new ZoneView(workplace, model, round, this, density(workplace.preferences())));
         });
+    }
+
+    @Override
+    public void toStore(Runnable back) {
+        StoreModel model = new StoreModel(workplace);
+        show(() -> new StoreView(workplace, model, back));
     }
 
     @Override

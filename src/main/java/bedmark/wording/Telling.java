@@ -32,6 +32,8 @@ public final class Telling {
     private static final Set<Rule> ABOUT_POWER = Set.of(Rule.DRIVE_NEAR_RATING, Rule.SKIRTS_OVER_BUDGET);
     private static final Set<Rule> ABOUT_DEPTH =
             Set.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD, Rule.BED_BEHIND_BELT);
+    /** Their clauses speak of the bed, so that a second one can go on about it. */
+    private static final Set<Rule> ABOUT_BED = Set.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD);
     private static final Set<String> LOWER_THE_BED = Set.of("free-bed", "lower-feed", "widen-boards");
     /** The depth speaks first where several rules say the same level. */
     private static final List<Rule> FIRST = List.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD,
@@ -51,8 +53,16 @@ public final class Telling {
         Optional<String> atDesign = assessment.level() == Level.INCOMPLETE ? Optional.empty()
                 : Optional.of(atDesign(assessment));
         return new Told(sentence(assessment, leading), leading.flatMap(finding -> sure(assessment, finding)),
-                atDesign, figures(assessment), action(assessment, leading),
+                leading.filter(finding -> assessment.level() != Level.INCOMPLETE).flatMap(this::against), atDesign, figures(assessment), action(assessment, leading),
                 assessment.repeat().map(this::repeat));
+    }
+
+    /** What the leading rule observed against the limit of its level; nothing where it has no limit. */
+    private Optional<String> against(Finding finding) {
+        boolean warns = finding.level() == Level.NEAR;
+        OptionalDouble limit = warns || finding.overloaded().isEmpty() ? finding.near() : finding.overloaded();
+        return limit.isEmpty() ? Optional.empty() : Optional.of(wording.text("verdict.against",
+                observed(finding, finding.observed()), limit(finding, limit.getAsDouble())));
     }
 
     /** The reading to take again, and within how much (k = 2) it would settle the verdict. */
@@ -79,9 +89,10 @@ public final class Telling {
     private String sentence(Assessment assessment, Optional<Finding> leading) {
         Level level = assessment.level();
         if (level == Level.INCOMPLETE) {
-            List<String> waiting = assessment.missingRequired();
+            List<String> waiting = assessment.missingRequired().stream().map(name -> wording.asked(name, form))
+                    .distinct().toList();
             return waiting.isEmpty() ? wording.text("verdict.incomplete")
-                    : wording.text("verdict.incomplete-for", wording.reading(waiting.get(0), form),
+                    : wording.text("verdict.incomplete-for", waiting.get(0),
                             wording.format().computed(waiting.size() - 1.0, 0), waiting.size() - 1);
         }
         if (leading.isEmpty()) {
@@ -90,8 +101,10 @@ public final class Telling {
         Optional<Finding> lagging = assessment.findings().stream()
                 .filter(finding -> finding.rule() == Rule.BED_BEHIND_BELT && finding.level() != Level.WITHIN
                         && leading.get().rule() != Rule.BED_BEHIND_BELT).findFirst();
-        return lagging.map(second -> wording.text("verdict.sentence-two", level(level), clause(leading.get()),
-                        clause(second)))
+        return lagging.map(second -> wording.text(ABOUT_BED.contains(leading.get().rule())
+                                ? "verdict.sentence-bed" : "verdict.sentence-two", level(level), clause(leading.get()),
+                        ABOUT_BED.contains(leading.get().rule()) ? wording.text("rule.bed-behind-belt.too",
+                                observed(second, second.observed())) : clause(second)))
                 .orElseGet(() -> wording.text("verdict.sentence", level(level), clause(leading.get())));
     }
 
@@ -107,19 +120,29 @@ public final class Telling {
 
     /** A number of a finding in the way in which its rule is spoken of. */
     public String observed(Finding finding, double number) {
-        if (finding.rule() == Rule.SEAL_DEFECT) {
+        return observed(finding.rule(), number);
+    }
+
+    private String observed(Rule rule, double number) {
+        if (rule == Rule.SEAL_DEFECT) {
             return wording.format().computed(number, 0);
         }
-        if (finding.rule() == Rule.BELT_TOO_FAST) {
+        if (rule == Rule.BELT_TOO_FAST) {
             return wording.computed(number, wording.units().unit(Dimension.SPEED));
         }
-        return TIMES.contains(finding.rule()) ? wording.format().computed(number, 1) : wording.percent(number);
+        return TIMES.contains(rule) ? wording.format().computed(number, 1) : wording.percent(number);
     }
 
     /** A limit of a finding in the way in which its rule is spoken of. */
     public String limit(Finding finding, double limit) {
         return TIMES.contains(finding.rule()) ? wording.format().exact(BigDecimal.valueOf(limit))
                 : observed(finding, limit);
+    }
+
+    /** A limit as it is set: that of the belt's speed is a share of the speed in its table. */
+    public String setLimit(Rule rule, double limit) {
+        return TIMES.contains(rule) ? wording.format().exact(BigDecimal.valueOf(limit))
+                : rule == Rule.BELT_TOO_FAST ? wording.percent(limit) : observed(rule, limit);
     }
 
     /** Nothing where the verdict rests on what is counted or seen, and not on a reading with an uncertainty. */

@@ -138,6 +138,16 @@ public record Wording(Words words, UnitSystem units) {
     }
 
     /**
+     * What people call what is asked for: the whole table where a reading stands in one.
+     *
+     * @param name a JSON Pointer as the engine names its readings
+     */
+    public String asked(String name, FieldForm form) {
+        return form.fieldAt(Pointer.parse(name)).map(field -> inSentence(field.head().label().in(words.language())))
+                .orElseGet(() -> reading(name, form));
+    }
+
+    /**
      * What people call a reading or a registered number.
      *
      * @param name a JSON Pointer as the engine names its readings

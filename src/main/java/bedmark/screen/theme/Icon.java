@@ -11,6 +11,9 @@ public enum Icon {
     /** A stick with an arrow onto it: what leaves the tablet. */
     EXPORT("M6 13 H18 V21 H6 Z M9.5 21 V17.5 M14.5 21 V17.5 M12 2.5 V10 M8.5 6.5 L12 10 L15.5 6.5"),
     PLUS("M12 4.5 V19.5 M4.5 12 H19.5"),
+    MINUS("M4.5 12 H19.5"),
+    /** To and fro over a belt. */
+    SPEED("M3 9 H21 M6.5 5.5 L3 9 L6.5 12.5 M17.5 5.5 L21 9 L17.5 12.5 M3 18.5 H21"),
     CROSS("M5.5 5.5 L18.5 18.5 M18.5 5.5 L5.5 18.5"),
     /** A magnifying glass. */
     FIND("M16.5 10 A6.5 6.5 0 1 1 3.5 10 A6.5 6.5 0 1 1 16.5 10 M15 14.5 L21 20.5"),

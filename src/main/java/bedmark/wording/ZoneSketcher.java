@@ -1,4 +1,4 @@
-package bedmark.screen.zone;
+package bedmark.wording;
 
 import bedmark.document.Branch;
 import bedmark.document.Node;
@@ -8,7 +8,6 @@ import bedmark.engine.Datum;
 import bedmark.engine.LoadingZone;
 import bedmark.engine.Result;
 import bedmark.engine.bed.DepthPoint;
-import bedmark.engine.seal.SealSegment;
 import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Reading;
 import bedmark.engine.verdict.AllowedDepth;
@@ -20,8 +19,8 @@ import bedmark.picture.ZoneSketch;
 import bedmark.quantity.Dimension;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
+import bedmark.survey.Assessor;
 import bedmark.survey.Survey;
-import bedmark.wording.Wording;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.util.ArrayList;
@@ -31,12 +30,12 @@ import java.util.OptionalDouble;
 import java.util.OptionalInt;
 
 /** Draws up what is known of a survey for its zone picture: numbers as the engine sees them, words as people do. */
-final class ZoneSketcher {
-    private final ZoneSetting setting;
+public final class ZoneSketcher {
+    private final Assessor assessor;
     private final Wording wording;
 
-    ZoneSketcher(ZoneSetting setting, Wording wording) {
-        this.setting = setting;
+    public ZoneSketcher(Assessor assessor, Wording wording) {
+        this.assessor = assessor;
         this.wording = wording;
     }
 
@@ -45,7 +44,7 @@ final class ZoneSketcher {
      *
      * @param active the line of the table of depths that the person has in hand
      */
-    ZoneSketch sketch(Branch document, Optional<Assessment> assessment, Optional<Integer> active) {
+    public ZoneSketch sketch(Branch document, Optional<Assessment> assessment, Optional<Integer> active) {
         LoadingZone zone = zone(document);
         OptionalDouble length = number(zone, Datum.ZONE_LENGTH);
         OptionalDouble height = number(zone, Datum.READ_HEIGHT, Datum.REGISTER_HEIGHT);
@@ -65,9 +64,9 @@ final class ZoneSketcher {
     /** The engine's zone; while something in it is impossible, the picture shows what the register knows. */
     private LoadingZone zone(Branch document) {
         try {
-            return setting.assessor().zone(new Survey(document));
+            return assessor.zone(new Survey(document));
         } catch (Refused e) {
-            return setting.assessor().zone(new Survey(document.with("readings", Branch.EMPTY)));
+            return assessor.zone(new Survey(document.with("readings", Branch.EMPTY)));
         }
     }
 
@@ -103,7 +102,7 @@ final class ZoneSketcher {
     }
 
     /** The line of the table that each station of {@link #stations} stands for. */
-    static List<Integer> lines(Branch document) {
+    public static List<Integer> lines(Branch document) {
         List<Integer> lines = new ArrayList<>();
         List<Node> rows = document.at(Survey.READINGS.child("bedDepths"))
                 .filter(Node.Series.class::isInstance).map(node -> ((Node.Series) node).items()).orElse(List.of());
@@ -147,12 +146,12 @@ final class ZoneSketcher {
                 length.isPresent() ? wording.computed(length.getAsDouble(), metres)
                         : wording.text("screen.picture.length-unknown"),
                 allowed.map(limit -> small(limit.overloaded().orElseThrow())).orElse(""),
-                wording.text("screen.picture.allowed"),
+                allowed.map(limit -> wording.text("zone.limit." + limit.rule().code())).orElse(""),
                 times -> wording.text("screen.picture.heights", wording.format().exact(
                         new BigDecimal(times, new MathContext(2)).stripTrailingZeros())),
                 stations.isEmpty() ? Optional.of(wording.text("screen.picture.prompt")) : Optional.empty(),
                 spacing.isPresent() ? small(spacing.getAsDouble()) : wording.text("screen.picture.width-unknown"),
-                sectionTitle(stations), seals(zone.seals()));
+                sectionTitle(stations), new SectionNote(wording, this::small).of(zone, shownAt(stations)));
     }
 
     private String sectionTitle(List<ZoneSketch.Station> stations) {
@@ -161,15 +160,10 @@ final class ZoneSketcher {
                 : "";
     }
 
-    /** The seals in a few words: the defects, else that they are sound. */
-    private String seals(List<SealSegment> seals) {
-        if (seals.isEmpty()) {
-            return wording.text("screen.picture.seals-unknown");
-        }
-        List<String> defects = seals.stream().filter(segment -> segment.condition().isDefect())
-                .map(segment -> wording.text("screen.seal." + segment.condition().code())).distinct().toList();
-        return defects.isEmpty() ? wording.text("screen.picture.seals-sound")
-                : wording.text("screen.picture.seals", String.join(", ", defects));
+    /** Where the zone is cut across. */
+    private static double shownAt(List<ZoneSketch.Station> stations) {
+        OptionalInt shown = ZoneSketch.shown(stations);
+        return shown.isPresent() ? stations.get(shown.getAsInt()).position() : 0;
     }
 
     /** A depth or width as a bare number of the small unit; the picture's captions share one unit. */

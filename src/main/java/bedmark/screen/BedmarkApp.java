@@ -3,13 +3,11 @@ package bedmark.screen;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
 import bedmark.survey.LevelWord;
-import java.io.File;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Optional;
 import javafx.application.Application;
 import javafx.application.Platform;
-import javafx.stage.DirectoryChooser;
 import javafx.stage.Stage;
 
 /** The window of the tablet app. */
@@ -52,7 +50,7 @@ public final class BedmarkApp extends Application {
     public void start(Stage stage) {
         Launch given = launch.orElseThrow();
         workplace = new Workplace(given.store(), given.clock(), Platform::runLater,
-                (title, begin) -> chooseFolder(stage, title, begin), given.samples());
+                new StageChoice(stage), given.samples());
         shell = new Shell(workplace, WIDTH, HEIGHT);
         // Whatever goes wrong on the screen: what was typed is saved first, and the person goes on.
         Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> shell.failed(failure));
@@ -62,13 +60,6 @@ public final class BedmarkApp extends Application {
         if (given.load()) {
             shell.loadDemo();
         }
-    }
-
-    private static Optional<Path> chooseFolder(Stage stage, String title, Optional<Path> begin) {
-        DirectoryChooser chooser = new DirectoryChooser();
-        chooser.setTitle(title);
-        begin.map(Path::toFile).filter(File::isDirectory).ifPresent(chooser::setInitialDirectory);
-        return Optional.ofNullable(chooser.showDialog(stage)).map(File::toPath);
     }
 
     @Override

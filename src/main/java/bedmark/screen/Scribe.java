@@ -72,6 +72,11 @@ public final class Scribe implements AutoCloseable {
         });
     }
 
+    /** Runs on the screen once all that was given to save before is saved, or could not be. */
+    public void afterwards(Runnable then) {
+        pen.execute(() -> screen.execute(then));
+    }
+
     /** Shows trouble that came from elsewhere, until the next act is saved. */
     void report(Defect defect) {
         trouble.set(Optional.of(defect));

@@ -60,7 +60,7 @@ public final class Workplace implements AutoCloseable {
     }
 
     private static Wording wording(Preferences preferences) {
-        return new Wording(new Words(preferences.locale()), preferences.units());
+        return new Wording(new Words(preferences.locale()), preferences.units(), preferences.chosenUnits());
     }
 
     private Optional<Site> readSite() {

@@ -5,6 +5,7 @@ import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.json.BundleReader;
 import bedmark.journal.NotSaved;
+import bedmark.screen.Listening;
 import bedmark.screen.Site;
 import bedmark.screen.Workplace;
 import bedmark.survey.Act;
@@ -40,14 +41,18 @@ public final class StartModel {
     private final DoubleProperty loading = new SimpleDoubleProperty(-1);
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final BooleanBinding ready;
+    private final Listening listening = new Listening();
 
     public StartModel(Workplace workplace) {
         this.workplace = workplace;
         person.set(workplace.preferences().person());
         person.addListener((property, before, now) ->
                 workplace.preferencesProperty().set(workplace.preferences().withPerson(now.strip())));
-        workplace.siteProperty().addListener((property, before, now) -> chooseRound());
+        listening.onChange(workplace.siteProperty(), site -> chooseRound());
+        round.addListener((property, before, now) -> recall());
+        person.addListener((property, before, now) -> recall());
         chooseRound();
+        recall();
         ready = Bindings.createBooleanBinding(() -> !person.get().isBlank() && round.get() != null
                 && cautionRead.get(), person, round, cautionRead);
     }
@@ -58,6 +63,24 @@ public final class StartModel {
         round.set(workplace.store().walks().stream().filter(walk -> walk.underWay())
                 .flatMap(walk -> rounds.stream().filter(one -> one.id().equals(walk.round()))).findFirst()
                 .orElse(rounds.isEmpty() ? null : rounds.get(0)));
+    }
+
+    /** The caution is acknowledged once a walk: whoever goes on with their own need not do so again. */
+    private void recall() {
+        if (round.get() != null && goesOn()) {
+            cautionRead.set(true);
+        }
+    }
+
+    /** Whether the chosen round is being walked by this person already. */
+    public boolean goesOn() {
+        return workplace.store().walk(round.get().id()).filter(walk -> walk.underWay()
+                && walk.person().equals(person.get().strip())).isPresent();
+    }
+
+    /** Listens to nothing any more; the screen has left the stage. */
+    public void leave() {
+        listening.end();
     }
 
     public StringProperty personProperty() {
@@ -99,8 +122,12 @@ public final class StartModel {
         return workplace.siteProperty().get().map(Site::rounds).orElse(List.of());
     }
 
-    /** Starts the walk. */
+    /** Starts the walk, or goes on with it. */
     public void start(Runnable then) {
+        if (goesOn()) {
+            then.run();
+            return;
+        }
         workplace.scribe().save(person.get(), new Act.WalkStarted(round.get().id()), entry -> then.run());
     }
 

@@ -7,6 +7,7 @@ import bedmark.document.Refused;
 import bedmark.engine.Assessment;
 import bedmark.form.Field;
 import bedmark.form.Judgement;
+import bedmark.form.Measure;
 import bedmark.form.SpeedField;
 import bedmark.form.StationsField;
 import bedmark.quantity.BeltState;
@@ -26,6 +27,7 @@ import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.UnaryOperator;
 import java.util.stream.Stream;
 import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.ObjectProperty;
@@ -47,6 +49,7 @@ public final class ZoneModel {
     private final Map<Pointer, Unit> chosenUnits = new HashMap<>();
     private final Set<Pointer> believed = new HashSet<>();
     private final SurveyInWork work;
+    private UnaryOperator<Unit> liked = UnaryOperator.identity();
     private final BooleanBinding undoable;
     private final ReadOnlyObjectWrapper<Branch> survey;
     private final ReadOnlyObjectWrapper<List<SlotRow>> rows;
@@ -450,7 +453,19 @@ public final class ZoneModel {
         return Optional.ofNullable(chosenUnits.get(slot.where()))
                 .or(() -> quantity(document(), slot.where()).map(Quantity::unit)
                         .filter(measured.measure().units()::contains))
-                .or(() -> Optional.of(measured.measure().unit(units.get())));
+                .or(() -> Optional.of(offered(measured.measure())));
+    }
+
+    /** The unit that a number is asked in first: the one that the person likes, where the form has it. */
+    Unit offered(Measure measure) {
+        Unit usual = measure.unit(units.get());
+        return Optional.of(liked.apply(usual)).filter(measure.units()::contains).orElse(usual);
+    }
+
+    /** Asks first in the unit that the person likes better than a usual one. */
+    void likeUnits(UnaryOperator<Unit> better) {
+        liked = better;
+        unitChanged();
     }
 
     /** The unit in which the active cell is typed; only where it is a number with a unit. */

@@ -218,6 +218,8 @@ public final class Shell implements Navigator {
         walked = Optional.of(round);
         round.reload();
         show(() -> new RoundView(workplace, round, this));
+        // What was completed a moment ago may still be on its way to the store.
+        workplace.scribe().afterwards(round::reload);
     }
 
     @Override
@@ -249,15 +251,18 @@ public final class Shell implements Navigator {
 
     @Override
     public void toFinish(RoundModel round) {
-        round.reload();
-        FinishModel model = new FinishModel(workplace, round);
-        show(() -> new FinishView(workplace, model, this));
+        workplace.scribe().afterwards(() -> {
+            round.reload();
+            FinishModel model = new FinishModel(workplace, round);
+            show(() -> new FinishView(workplace, model, this));
+        });
     }
 
     @Override
     public void toQueue(RoundModel round) {
         QueueModel model = new QueueModel(workplace);
         show(() -> new QueueView(workplace, model, round, this));
+        workplace.scribe().afterwards(model::reload);
     }
 
     @Override

@@ -16,6 +16,9 @@ import bedmark.quantity.TypedNumber;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import bedmark.words.Words;
+import java.time.LocalDate;
+import java.time.OffsetDateTime;
+import java.time.format.DateTimeFormatter;
 import java.util.Map;
 import java.util.Optional;
 
@@ -63,6 +66,16 @@ public record Wording(Words words, UnitSystem units, Map<Unit, Unit> liked) {
     /** The symbol of a unit. */
     public String symbol(Unit unit) {
         return text("unit." + unit.key());
+    }
+
+    /** A day of the calendar, with its month in letters: figures alone are read one way here and another there. */
+    public String day(LocalDate day) {
+        return DateTimeFormatter.ofPattern("d MMM uuuu", words.locale()).format(day);
+    }
+
+    /** A day and the time of day there. */
+    public String moment(OffsetDateTime at) {
+        return day(at.toLocalDate()) + ", " + DateTimeFormatter.ofPattern("HH:mm").format(at);
     }
 
     /** A computed number in a unit, with its symbol. */

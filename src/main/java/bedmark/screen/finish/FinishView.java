@@ -33,6 +33,7 @@ import javafx.scene.control.ProgressBar;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
@@ -178,13 +179,13 @@ public final class FinishView extends SidedScreen {
             figures.add(new Figure(wording.text("finish.saving"), wording.format().computed(total.savedWh() / 1e6, 1),
                     wording.text("finish.megawatt-hours")));
         }
-        FlowPane blocks = new FlowPane();
+        GridPane blocks = new GridPane();
         blocks.getStyleClass().add("total");
-        figures.forEach(figure -> {
+        for (int i = 0; i < figures.size(); i++) {
             FigureBlock block = new FigureBlock();
-            block.show(figure);
-            blocks.getChildren().add(block);
-        });
+            block.show(figures.get(i));
+            blocks.add(block, i % 2, i / 2);
+        }
         side.getChildren().addAll(blocks, Labels.wrapped("words", wording.text("finish.over", total.zones())));
     }
 

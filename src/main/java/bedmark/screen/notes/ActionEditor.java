@@ -1,5 +1,6 @@
 package bedmark.screen.notes;
 
+import bedmark.screen.pad.NumericPad;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.ChoiceRow;
 import bedmark.screen.part.Labels;
@@ -14,7 +15,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
 import javafx.geometry.Pos;
-import javafx.scene.Node;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Control;
 import javafx.scene.control.Label;
@@ -39,7 +39,7 @@ final class ActionEditor extends VBox {
     private final Label day = new Label();
     private final Label gap = Labels.wrapped("trouble-text", "");
     private final HBox seals = new HBox();
-    private final Consumer<Optional<Node>> keys;
+    private final Consumer<Optional<NumericPad>> keys;
     private final Consumer<Optional<PlannedAction>> done;
     private Optional<LocalDate> by;
     private Optional<String> sealType;
@@ -49,7 +49,7 @@ final class ActionEditor extends VBox {
      * @param keys shows the pad beside, or takes it away
      * @param done gets the action, or nothing where the person thought better of it
      */
-    ActionEditor(Wording wording, PlannedAction before, LocalDate today, Consumer<Optional<Node>> keys,
+    ActionEditor(Wording wording, PlannedAction before, LocalDate today, Consumer<Optional<NumericPad>> keys,
                  Consumer<Optional<PlannedAction>> done) {
         this.wording = wording;
         this.before = before;
@@ -65,7 +65,7 @@ final class ActionEditor extends VBox {
         getChildren().addAll(header, field("action-what", "notes.what", what, before.what()), gap, phrases(),
                 pair(field("action-who", "notes.who", who, before.who()),
                         field("action-order", "notes.work-order", workOrder, before.workOrder())),
-                days(), sealRow(), seals, buttons());
+                days(), sealRow(), seals);
         seals.managedProperty().bind(seals.visibleProperty());
         seals.setVisible(false);
         if (before.seal().isPresent()) {
@@ -131,7 +131,7 @@ final class ActionEditor extends VBox {
 
     private void setBy(Optional<LocalDate> wanted) {
         by = wanted;
-        day.setText(by.map(new ActionWords(wording)::day).orElse(wording.text("notes.no-day")));
+        day.setText(by.map(wording::day).orElse(wording.text("notes.no-day")));
     }
 
     private HBox sealRow() {
@@ -159,7 +159,9 @@ final class ActionEditor extends VBox {
             seals.setVisible(false);
             keys.accept(Optional.empty());
         });
-        VBox all = new VBox(new ChoiceRow(wording.text("notes.seal-to-order"), types), sizes, none);
+        ChoiceRow kinds = new ChoiceRow(wording.text("notes.seal-to-order"), types);
+        kinds.getStyleClass().add("many");
+        VBox all = new VBox(kinds, sizes, none);
         none.setMaxWidth(Double.MAX_VALUE);
         all.getStyleClass().add("question");
         HBox.setHgrow(all, Priority.ALWAYS);
@@ -175,7 +177,8 @@ final class ActionEditor extends VBox {
                 .setSelected(("seal-type-" + type).equals(node.getId())));
     }
 
-    private HBox buttons() {
+    /** To keep the action or to think better of it; they stand below and do not scroll away. */
+    HBox buttons() {
         ActionButton keep = ActionButton.with(Icon.CHECK, ContentDisplay.LEFT, Weight.PRIMARY,
                 wording.text("notes.keep"), this::keep);
         keep.setId("action-keep");
@@ -183,7 +186,7 @@ final class ActionEditor extends VBox {
                 () -> done.accept(Optional.empty()));
         cancel.setId("action-cancel");
         HBox row = new HBox(cancel, keep);
-        row.getStyleClass().add("row");
+        row.getStyleClass().addAll("row", "editor-buttons");
         grow(cancel);
         grow(keep);
         return row;
@@ -195,11 +198,19 @@ final class ActionEditor extends VBox {
             what.requestFocus();
             return;
         }
+        done.accept(written());
+    }
+
+    /** The action as it stands; nothing as long as it is not said what is to be done. */
+    Optional<PlannedAction> written() {
+        if (what.getText().isBlank()) {
+            return Optional.empty();
+        }
         PlannedAction written = before.with("what", what.getText()).with("who", who.getText())
                 .with("workOrder", workOrder.getText());
         PlannedAction dated = by.equals(before.by()) ? written : written.withBy(by);
-        done.accept(Optional.of(dated.withSeal(boxes.map(sizes -> sizes.order(sealType))
-                .orElse(PlannedAction.SealOrder.NONE))));
+        return Optional.of(dated.withSeal(boxes.map(sizes -> sizes.order(sealType))
+                .orElse(PlannedAction.SealOrder.NONE)));
     }
 
     private static ActionButton secondary(String id, String text, Runnable action) {

@@ -3,9 +3,6 @@ package bedmark.screen.notes;
 import bedmark.quantity.Quantity;
 import bedmark.survey.PlannedAction;
 import bedmark.wording.Wording;
-import java.time.LocalDate;
-import java.time.format.DateTimeFormatter;
-import java.time.format.FormatStyle;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -17,18 +14,13 @@ final class ActionWords {
         this.wording = wording;
     }
 
-    /** A day as the person's language writes it. */
-    String day(LocalDate day) {
-        return DateTimeFormatter.ofLocalizedDate(FormatStyle.MEDIUM).withLocale(wording.words().locale()).format(day);
-    }
-
     /** Who, by when, under which order, and which seal: what stands below what is to be done. */
     String details(PlannedAction action) {
         List<String> parts = new ArrayList<>();
         if (!action.who().isEmpty()) {
             parts.add(action.who());
         }
-        action.by().ifPresent(by -> parts.add(wording.text("notes.by", day(by))));
+        action.by().ifPresent(by -> parts.add(wording.text("notes.by", wording.day(by))));
         if (!action.workOrder().isEmpty()) {
             parts.add(action.workOrder());
         }

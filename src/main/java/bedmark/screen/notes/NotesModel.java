@@ -36,6 +36,7 @@ public final class NotesModel {
     private final Optional<Branch> last;
     private final ReadOnlyObjectWrapper<SurveyHistory> history;
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final CameraModel camera;
     private int onTheWay;
 
     /**
@@ -47,11 +48,18 @@ public final class NotesModel {
         this.workplace = workplace;
         this.last = last;
         this.history = new ReadOnlyObjectWrapper<>(history);
+        this.camera = new CameraModel(workplace, () -> photos().stream()
+                .flatMap(photo -> photo.text("sha256").stream()).toList());
     }
 
     /** The survey as the journal has it. */
     public ReadOnlyObjectProperty<SurveyHistory> historyProperty() {
         return history.getReadOnlyProperty();
+    }
+
+    /** The newest photos of the watched folder. */
+    public CameraModel camera() {
+        return camera;
     }
 
     /** Why the last photo was not attached. */

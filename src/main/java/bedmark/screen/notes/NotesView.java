@@ -37,6 +37,8 @@ public final class NotesView extends SidedScreen {
     private final PhotoPane photos;
     private final VBox list = new VBox();
     private final ScrollPane scroll = new ScrollPane(list);
+    /** Keeps an action that is being written when the screen is left. */
+    private Optional<Runnable> unfinished = Optional.empty();
 
     public NotesView(Workplace workplace, NotesModel model, RoundModel round, RoundRow row, Navigator navigator) {
         super("summary");
@@ -164,11 +166,18 @@ public final class NotesView extends SidedScreen {
 
     private void write(OptionalInt place, PlannedAction action) {
         ActionEditor editor = new ActionEditor(wording, action, model.today(), photos::showKeys, written -> {
+            unfinished = Optional.empty();
             written.ifPresent(done -> model.put(place, done));
             showList();
             focus("action-add");
         });
+        unfinished = Optional.of(() -> editor.written().filter(now -> !now.equals(action))
+                .ifPresent(now -> model.put(place, now)));
         edit(editor);
+        VBox work = new VBox(scroll, editor.buttons());
+        VBox.setVgrow(scroll, Priority.ALWAYS);
+        scroll.setMinHeight(0);
+        body.setCenter(work);
         editor.begin();
     }
 
@@ -197,6 +206,8 @@ public final class NotesView extends SidedScreen {
     @Override
     public void left() {
         photos.leave();
+        unfinished.ifPresent(Runnable::run);
+        unfinished = Optional.empty();
         super.left();
     }
 }

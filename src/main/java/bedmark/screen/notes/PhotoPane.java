@@ -5,6 +5,7 @@ import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.screen.Listening;
 import bedmark.screen.Workplace;
+import bedmark.screen.pad.NumericPad;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Labels;
 import bedmark.screen.part.SectionHeader;
@@ -12,23 +13,22 @@ import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Icon;
 import bedmark.wording.Wording;
 import java.nio.file.Path;
-import java.time.format.DateTimeFormatter;
-import java.time.format.FormatStyle;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Consumer;
+import javafx.geometry.VPos;
 import javafx.scene.Node;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.FlowPane;
-import javafx.scene.layout.StackPane;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
 /** The photos of a survey as tiles, and the newest of the camera that are not on it yet. */
-final class PhotoPane extends StackPane {
-    private static final double RATIO = 0.72;
+final class PhotoPane extends VBox {
+    private static final double RATIO = 0.75;
 
     private final Workplace workplace;
     private final NotesModel model;
@@ -40,6 +40,7 @@ final class PhotoPane extends StackPane {
     private final ScrollPane scroll = new ScrollPane(content);
     private final Map<Path, Optional<Thumbnail>> thumbnails = new HashMap<>();
     private double tile = 100;
+    private boolean portrait;
 
     /**
      * @param edit  puts an editor where there is room for it
@@ -51,12 +52,14 @@ final class PhotoPane extends StackPane {
         this.wording = workplace.wording();
         this.edit = edit;
         this.close = close;
-        this.camera = new CameraModel(workplace, () -> model.photos().stream()
-                .flatMap(photo -> photo.text("sha256").stream()).toList());
+        this.camera = model.camera();
         content.getStyleClass().add("photos");
         scroll.setFitToWidth(true);
         scroll.setFocusTraversable(false);
         scroll.getStyleClass().add("form-scroll");
+        scroll.setMinHeight(0);
+        VBox.setVgrow(scroll, Priority.ALWAYS);
+        getStyleClass().add("photo-pane");
         getChildren().add(scroll);
         listening.onChange(model.historyProperty(), history -> layOut());
         listening.onChange(model.troubleProperty(), trouble -> layOut());
@@ -75,15 +78,21 @@ final class PhotoPane extends StackPane {
     }
 
     /** Told when the tablet is turned: two tiles beside each other, or four. */
-    void turned(boolean portrait) {
+    void turned(boolean upright) {
+        portrait = upright;
         double mm = workplace.preferences().dpi() / 25.4;
         tile = Math.floor((portrait ? 28 : 29) * mm);
         layOut();
     }
 
-    /** Gives the room to the keys of a pad, or takes it back. */
-    void showKeys(Optional<Node> keys) {
-        getChildren().setAll(keys.orElse(scroll));
+    /** Shows the keys of a pad below the photos, or takes them away. */
+    void showKeys(Optional<NumericPad> keys) {
+        getChildren().setAll(scroll);
+        keys.ifPresent(pad -> {
+            pad.turned(portrait);
+            pad.getStyleClass().add("seal-keys");
+            getChildren().add(pad);
+        });
     }
 
     void takeKeysAway() {
@@ -112,6 +121,7 @@ final class PhotoPane extends StackPane {
     private static FlowPane tiles() {
         FlowPane tiles = new FlowPane();
         tiles.getStyleClass().add("tiles");
+        tiles.setRowValignment(VPos.TOP);
         return tiles;
     }
 
@@ -169,8 +179,7 @@ final class PhotoPane extends StackPane {
     }
 
     private void open(Branch photo, String id, String caption) {
-        String taken = photo.time("takenAt").map(at -> DateTimeFormatter.ofLocalizedDateTime(FormatStyle.MEDIUM,
-                FormatStyle.SHORT).withLocale(wording.words().locale()).format(at)).orElse("");
+        String taken = photo.time("takenAt").map(wording::moment).orElse("");
         PhotoEditor editor = new PhotoEditor(wording, caption, taken, model.open(), new PhotoEditor.Outcome() {
             @Override
             public void captioned(String text) {

@@ -37,6 +37,7 @@ public final class ChoiceRow extends VBox {
             button.getStyleClass().add("secondary-target");
             button.setMaxWidth(Double.MAX_VALUE);
             button.setPrefWidth(100);
+            button.setMinWidth(0);
             button.setWrapText(true);
             HBox.setHgrow(button, Priority.ALWAYS);
             row.getChildren().add(button);

@@ -19,9 +19,6 @@ import bedmark.screen.theme.LevelGlyph;
 import bedmark.screen.theme.LevelShape;
 import bedmark.survey.InspectionStatus;
 import bedmark.wording.Wording;
-import java.time.LocalDate;
-import java.time.format.DateTimeFormatter;
-import java.time.format.FormatStyle;
 import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -179,6 +176,7 @@ public final class RoundView extends SidedScreen {
         LevelGlyph glyph = new LevelGlyph(shape(row));
         Label tag = new Label(row.tag());
         tag.getStyleClass().add("tag");
+        tag.setMinWidth(Region.USE_PREF_SIZE);
         Label what = new Label(row.what());
         what.getStyleClass().add("what");
         HBox first = new HBox(tag);
@@ -235,8 +233,9 @@ public final class RoundView extends SidedScreen {
             due.getStyleClass().addAll("now", row.overdue(model.today()) ? "overdue" : "due");
             states.getChildren().setAll(due);
         });
-        Label last = new Label(last(row));
-        last.getStyleClass().add("state");
+        Label last = new Label(row.last().flatMap(RoundRow.Last::on).isEmpty() ? last(row)
+                : wording.text("walk.last-dated", level(row.last().get()), wording.day(row.last().get().on().get())));
+        last.getStyleClass().addAll("state", "ghost");
         states.getChildren().add(last);
         states.setMinWidth(Region.USE_PREF_SIZE);
         return states;
@@ -256,17 +255,17 @@ public final class RoundView extends SidedScreen {
     /** By when a stop that waits is to be done. */
     private Optional<String> due(RoundRow row) {
         return row.dueBy().filter(day -> row.waits()).map(day -> wording.text(row.overdue(model.today())
-                ? "walk.overdue" : "walk.due", day(day)));
+                ? "walk.overdue" : "walk.due", wording.day(day)));
     }
 
-    private String day(LocalDate day) {
-        return DateTimeFormatter.ofLocalizedDate(FormatStyle.MEDIUM).withLocale(wording.words().locale()).format(day);
+    private String level(RoundRow.Last last) {
+        return wording.text("verdict.level." + (last.level().isEmpty() ? "incomplete" : last.level()));
     }
 
     private String last(RoundRow row) {
         return row.last().filter(last -> !last.level().isEmpty()).map(last -> {
-            String level = wording.text("verdict.level." + last.level());
-            return last.on().map(on -> wording.text("walk.last", level, day(on)))
+            String level = level(last);
+            return last.on().map(on -> wording.text("walk.last", level, wording.day(on)))
                     .orElseGet(() -> wording.text("screen.round.last", level));
         }).orElseGet(() -> wording.text("screen.round.never"));
     }
@@ -363,11 +362,15 @@ public final class RoundView extends SidedScreen {
         ActionButton back = ActionButton.with(Icon.BACK, ContentDisplay.LEFT, Weight.QUIET,
                 wording.text("screen.start.title"), navigator::toStart);
         back.setId("foot-back");
-        Optional<RoundRow> next = model.nextToDo("");
-        ActionButton onward = next.map(row -> ActionButton.with(Icon.NEXT, ContentDisplay.RIGHT, Weight.PRIMARY,
-                        wording.text("screen.round.next", row.tag()), () -> navigator.toZone(model, row)))
-                .orElseGet(() -> ActionButton.with(Icon.NEXT, ContentDisplay.RIGHT, Weight.PRIMARY,
-                        wording.text("walk.finish"), () -> navigator.toFinish(model)));
+        ActionButton onward = ActionButton.with(Icon.NEXT, ContentDisplay.RIGHT, Weight.PRIMARY, "",
+                () -> model.nextToDo("").ifPresentOrElse(row -> navigator.toZone(model, row),
+                        () -> navigator.toFinish(model)));
+        listening.to(model.rowsProperty(), rows -> {
+            String words = model.nextToDo("").map(row -> wording.text("screen.round.next", row.tag()))
+                    .orElse(wording.text("walk.finish"));
+            onward.setText(words);
+            onward.setAccessibleText(words);
+        });
         onward.setId("foot-next");
         return new FootBar(Optional.of(back), Optional.of(ticks), Optional.of(onward));
     }

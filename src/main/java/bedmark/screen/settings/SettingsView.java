@@ -245,6 +245,7 @@ public final class SettingsView extends SidedScreen {
         pair.getStyleClass().add("pair");
         for (VBox box : List.of(left, right)) {
             box.setPrefWidth(100);
+            box.setMinWidth(0);
             HBox.setHgrow(box, Priority.ALWAYS);
         }
         return pair;
@@ -258,7 +259,7 @@ public final class SettingsView extends SidedScreen {
             Label name = Labels.wrapped("rule-name", wording.text("rule." + limit.rule().code()));
             Label values = Labels.wrapped("rule-limits", values(limit));
             VBox row = new VBox(name, values);
-            row.getStyleClass().add("rule-row");
+            row.getStyleClass().add("limit-row");
             list.getChildren().add(row);
         }
         ScrollPane limits = new ScrollPane(list);

@@ -5,7 +5,6 @@ import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.json.BundleReader;
 import bedmark.journal.NotSaved;
-import bedmark.screen.Listening;
 import bedmark.screen.Site;
 import bedmark.screen.Workplace;
 import bedmark.survey.Act;
@@ -41,14 +40,12 @@ public final class StartModel {
     private final DoubleProperty loading = new SimpleDoubleProperty(-1);
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final BooleanBinding ready;
-    private final Listening listening = new Listening();
 
     public StartModel(Workplace workplace) {
         this.workplace = workplace;
         person.set(workplace.preferences().person());
         person.addListener((property, before, now) ->
                 workplace.preferencesProperty().set(workplace.preferences().withPerson(now.strip())));
-        listening.onChange(workplace.siteProperty(), site -> chooseRound());
         round.addListener((property, before, now) -> recall());
         person.addListener((property, before, now) -> recall());
         chooseRound();
@@ -57,8 +54,11 @@ public final class StartModel {
                 && cautionRead.get(), person, round, cautionRead);
     }
 
-    /** The round that was walked last and is not finished, else the first one. */
-    private void chooseRound() {
+    /** Told when there is a plant: the round that was walked last and is not finished, else the first one. */
+    public void chooseRound() {
+        if (round.get() != null) {
+            return;
+        }
         List<Round> rounds = rounds();
         round.set(workplace.store().walks().stream().filter(walk -> walk.underWay())
                 .flatMap(walk -> rounds.stream().filter(one -> one.id().equals(walk.round()))).findFirst()
@@ -76,11 +76,6 @@ public final class StartModel {
     public boolean goesOn() {
         return workplace.store().walk(round.get().id()).filter(walk -> walk.underWay()
                 && walk.person().equals(person.get().strip())).isPresent();
-    }
-
-    /** Listens to nothing any more; the screen has left the stage. */
-    public void leave() {
-        listening.end();
     }
 
     public StringProperty personProperty() {

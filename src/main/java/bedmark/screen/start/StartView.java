@@ -72,6 +72,7 @@ public final class StartView extends SidedScreen {
     }
 
     private void ask() {
+        model.chooseRound();
         questions.getChildren().clear();
         if (!model.hasPlant() || model.loadingProperty().get() >= 0) {
             offerDemo();
@@ -245,7 +246,6 @@ public final class StartView extends SidedScreen {
     @Override
     public void left() {
         model.personProperty().unbind();
-        model.leave();
         super.left();
     }
 }

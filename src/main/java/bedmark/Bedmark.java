@@ -2,6 +2,8 @@ package bedmark;
 
 import bedmark.command.BedmarkCommand;
 import bedmark.command.Surroundings;
+import bedmark.diary.Diary;
+import bedmark.diary.Happening;
 import bedmark.index.Store;
 import bedmark.screen.BedmarkApp;
 import bedmark.words.Words;
@@ -10,6 +12,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.logging.Level;
 import java.util.logging.Logger;
@@ -39,7 +42,12 @@ public final class Bedmark {
         TOOLKIT.setLevel(Level.SEVERE);
         Clock clock = Clock.systemDefaultZone();
         try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
-            return BedmarkApp.open(store, clock, samples, load);
+            Diary diary = new Diary(folder, clock);
+            Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> diary.note(failure));
+            diary.note(Happening.STORE_OPENED, Map.of());
+            boolean shown = BedmarkApp.open(store, diary, clock, samples, load);
+            diary.note(Happening.STORE_CLOSED, Map.of());
+            return shown;
         }
     }
 }

@@ -11,10 +11,10 @@ import java.util.concurrent.RejectedExecutionException;
  * One thread that does all work of its kind in order and is never interrupted: an interrupted thread closes the files
  * and the database that it is busy with. Whoever waits may be interrupted; the work is done all the same.
  */
-final class Desk implements AutoCloseable {
+public final class Desk implements AutoCloseable {
     private final ExecutorService thread;
 
-    Desk(String name) {
+    public Desk(String name) {
         thread = Executors.newSingleThreadExecutor(work -> {
             Thread one = new Thread(work, name);
             one.setDaemon(true);
@@ -23,22 +23,19 @@ final class Desk implements AutoCloseable {
     }
 
     /** Does work and waits for its result. */
-    <T> T call(Callable<T> work) {
-        return callThen(work, () -> { });
+    public <T> T call(Callable<T> work) {
+        FutureTask<T> task = new FutureTask<>(work);
+        begin(task);
+        return await(task);
     }
 
-    /** Does work and waits for its result; what is to follow it is done right after, while the caller goes on. */
-    <T> T callThen(Callable<T> work, Runnable after) {
-        FutureTask<T> task = new FutureTask<>(work);
+    /** Takes work that nobody waits for; it is done before all that is taken later. */
+    public void begin(Runnable work) {
         try {
-            thread.execute(() -> {
-                task.run();
-                after.run();
-            });
+            thread.execute(work);
         } catch (RejectedExecutionException e) {
             throw new IllegalStateException("the store is closed", e);
         }
-        return await(task);
     }
 
     private static <T> T await(FutureTask<T> task) {

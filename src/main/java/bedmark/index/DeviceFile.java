@@ -11,24 +11,31 @@ import java.nio.file.Path;
 import java.util.Optional;
 import java.util.UUID;
 
-/** The file {@code device.json}, which says whose store it is. */
-final class DeviceFile {
-    static final String NAME = "device.json";
+/** The file of a store, {@code device.json} on a tablet, which says whose it is. */
+public final class DeviceFile {
+    public static final String NAME = "device.json";
     private static final int LONGEST = 64 << 10;
 
     private final Path folder;
     private final FileLayer files;
+    private final String name;
 
     DeviceFile(Path folder, FileLayer files) {
+        this(folder, files, NAME);
+    }
+
+    /** @param name of the file, where it is not the one of a tablet's store */
+    public DeviceFile(Path folder, FileLayer files, String name) {
         this.folder = folder;
         this.files = files;
+        this.name = name;
     }
 
     /**
      * The identity that the file holds. A file that can't be understood is put aside, and counts as missing.
      */
-    Optional<Device> read() throws IOException {
-        Path file = folder.resolve(NAME);
+    public Optional<Device> read() throws IOException {
+        Path file = folder.resolve(name);
         if (!files.exists(file)) {
             return Optional.empty();
         }
@@ -46,20 +53,20 @@ final class DeviceFile {
         } catch (Refused e) {
             // Nothing depends on it: the journal knows the identity too.
         }
-        files.move(file, folder.resolve(NAME + ".unreadable"));
+        files.move(file, folder.resolve(name + ".unreadable"));
         return Optional.empty();
     }
 
     /** Makes the file, for an identity that is known already or a new one. */
-    Device write(Optional<UUID> known, String name) throws IOException {
-        Device device = new Device(known.orElseGet(UUID::randomUUID), name);
-        Path part = folder.resolve(NAME + ".part");
+    public Device write(Optional<UUID> known, String called) throws IOException {
+        Device device = new Device(known.orElseGet(UUID::randomUUID), called);
+        Path part = folder.resolve(name + ".part");
         files.delete(part);
         try (FileLayer.Output output = files.create(part)) {
             output.write(ByteBuffer.wrap(JsonWriter.indented(device.document())));
             output.force();
         }
-        files.move(part, folder.resolve(NAME));
+        files.move(part, folder.resolve(name));
         files.forceFolder(folder);
         return device;
     }

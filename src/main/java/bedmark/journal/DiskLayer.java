@@ -4,8 +4,10 @@ import java.io.Closeable;
 import java.io.IOException;
 import java.io.RandomAccessFile;
 import java.nio.ByteBuffer;
+import java.nio.channels.ClosedByInterruptException;
 import java.nio.channels.FileChannel;
 import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
@@ -56,24 +58,28 @@ final class DiskLayer implements FileLayer {
 
     @Override
     public Output create(Path file) throws IOException {
-        return new DiskOutput(FileChannel.open(file, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE));
+        return created(file);
     }
 
     @Override
     public Output createPrivate(Path file) throws IOException {
         boolean posix = file.getFileSystem().supportedFileAttributeViews().contains("posix");
-        FileAttribute<?>[] rights = posix ? new FileAttribute<?>[] {
+        return created(file, posix ? new FileAttribute<?>[] {
             PosixFilePermissions.asFileAttribute(PosixFilePermissions.fromString("rw-------"))
-        } : new FileAttribute<?>[0];
-        return new DiskOutput(FileChannel.open(file,
-                Set.of(StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE), rights));
+        } : new FileAttribute<?>[0]);
+    }
+
+    private static Output created(Path file, FileAttribute<?>... rights) throws IOException {
+        FileChannel.open(file, Set.of(StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE), rights).close();
+        return new DiskOutput(file);
     }
 
     @Override
     public Output append(Path file) throws IOException {
-        FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE);
-        channel.position(channel.size());
-        return new DiskOutput(channel);
+        if (!Files.exists(file)) {
+            throw new NoSuchFileException(file.toString());
+        }
+        return new DiskOutput(file);
     }
 
     @Override
@@ -100,8 +106,25 @@ final class DiskLayer implements FileLayer {
             // A folder cannot be opened there; the file system journals its names itself.
             return;
         }
+        boolean interrupted = false;
+        try {
+            while (!forced(folder)) {
+                interrupted |= Thread.interrupted();
+            }
+        } finally {
+            if (interrupted) {
+                Thread.currentThread().interrupt();
+            }
+        }
+    }
+
+    /** Nothing is forced where the thread is interrupted, since that closes the channel; then it is done again. */
+    private static boolean forced(Path folder) throws IOException {
         try (FileChannel channel = FileChannel.open(folder, StandardOpenOption.READ)) {
             force(channel);
+            return true;
+        } catch (ClosedByInterruptException e) {
+            return false;
         }
     }
 
@@ -131,27 +154,40 @@ final class DiskLayer implements FileLayer {
         return ProcessLock.take(file);
     }
 
-    private record DiskOutput(FileChannel channel) implements Output {
+    /** Writes without a channel, for the same reason as below: who saves may be interrupted at any time. */
+    private static final class DiskOutput implements Output {
+        private final RandomAccessFile file;
+
+        DiskOutput(Path path) throws IOException {
+            file = new RandomAccessFile(path.toFile(), "rw");
+            file.seek(file.length());
+        }
+
         @Override
         public void write(ByteBuffer bytes) throws IOException {
-            while (bytes.hasRemaining()) {
-                channel.write(bytes);
+            if (bytes.hasArray()) {
+                file.write(bytes.array(), bytes.arrayOffset() + bytes.position(), bytes.remaining());
+                bytes.position(bytes.limit());
+            } else {
+                byte[] copy = new byte[bytes.remaining()];
+                bytes.get(copy);
+                file.write(copy);
             }
         }
 
         @Override
         public void force() throws IOException {
-            channel.force(true);
+            file.getFD().sync();
         }
 
         @Override
         public long size() throws IOException {
-            return channel.size();
+            return file.length();
         }
 
         @Override
         public void close() throws IOException {
-            channel.close();
+            file.close();
         }
     }
 

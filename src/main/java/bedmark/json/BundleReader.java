@@ -9,7 +9,6 @@ import bedmark.survey.Bundle;
 import bedmark.survey.Register;
 import bedmark.survey.Round;
 import bedmark.survey.Survey;
-import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -40,7 +39,7 @@ public final class BundleReader {
     public static Bundle read(byte[] bytes) {
         Document document = JsonReader.read(bytes);
         try {
-            requireFormat(document.root());
+            FormatCheck.require(document.root(), Bundle.FORMAT, Bundle.VERSION);
             Compiled.SCHEMA.check(document).stream().findFirst().ifPresent(defect -> {
                 throw new Refused(defect);
             });
@@ -49,21 +48,6 @@ public final class BundleReader {
             return bundle;
         } catch (Refused e) {
             throw new Refused(document.placed(e.defect()), e);
-        }
-    }
-
-    /** Before anything else: another kind of file, or a later version, is not measured by this version's schema. */
-    private static void requireFormat(Branch root) {
-        String format = root.text("format").orElseThrow(() ->
-                new Refused(Defect.at(Pointer.ROOT, "key-absent", "format")));
-        if (!Bundle.FORMAT.equals(format)) {
-            throw new Refused(Defect.at(Pointer.of("format"), "format-unknown", format, Bundle.FORMAT));
-        }
-        BigDecimal version = root.number("version").orElseThrow(() ->
-                new Refused(Defect.at(Pointer.ROOT, "key-absent", "version")));
-        if (version.compareTo(BigDecimal.valueOf(Bundle.VERSION)) != 0) {
-            throw new Refused(Defect.at(Pointer.of("version"), "version-unknown", version.toPlainString(),
-                    Integer.toString(Bundle.VERSION)));
         }
     }
 

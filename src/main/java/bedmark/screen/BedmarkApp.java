@@ -1,5 +1,6 @@
 package bedmark.screen;
 
+import bedmark.diary.Diary;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
 import bedmark.survey.LevelWord;
@@ -22,7 +23,7 @@ public final class BedmarkApp extends Application {
     private Shell shell;
 
     /** A store that is open already, the folder with the demo plant, and whether to load it at once. */
-    private record Launch(Store store, Clock clock, Optional<Path> samples, boolean load) {
+    private record Launch(Store store, Diary diary, Clock clock, Optional<Path> samples, boolean load) {
     }
 
     /** The options that the app opens a store with. */
@@ -36,8 +37,8 @@ public final class BedmarkApp extends Application {
      *
      * @return false where there is no display to open a window on
      */
-    public static boolean open(Store store, Clock clock, Optional<Path> samples, boolean load) {
-        launch = Optional.of(new Launch(store, clock, samples, load));
+    public static boolean open(Store store, Diary diary, Clock clock, Optional<Path> samples, boolean load) {
+        launch = Optional.of(new Launch(store, diary, clock, samples, load));
         try {
             Application.launch(BedmarkApp.class);
             return true;
@@ -53,7 +54,10 @@ public final class BedmarkApp extends Application {
                 new StageChoice(stage), given.samples());
         shell = new Shell(workplace, WIDTH, HEIGHT);
         // Whatever goes wrong on the screen: what was typed is saved first, and the person goes on.
-        Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> shell.failed(failure));
+        Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> {
+            given.diary().note(failure);
+            shell.failed(failure);
+        });
         stage.setTitle("Bedmark");
         stage.setScene(shell.scene());
         stage.show();

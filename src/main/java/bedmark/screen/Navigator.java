@@ -21,6 +21,13 @@ public interface Navigator {
     /** To the end of the walk. */
     void toFinish(RoundModel round);
 
+    /**
+     * To the store's own screen.
+     *
+     * @param back the way back from there
+     */
+    void toStore(Runnable back);
+
     /** To the queue and the export. */
     void toQueue(RoundModel round);
 

@@ -13,6 +13,8 @@ import bedmark.screen.settings.SettingsModel;
 import bedmark.screen.settings.SettingsView;
 import bedmark.screen.start.StartModel;
 import bedmark.screen.start.StartView;
+import bedmark.screen.store.StoreModel;
+import bedmark.screen.store.StoreView;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Hand;
 import bedmark.screen.theme.Light;
@@ -256,6 +258,12 @@ public final class Shell implements Navigator {
             FinishModel model = new FinishModel(workplace, round);
             show(() -> new FinishView(workplace, model, this));
         });
+    }
+
+    @Override
+    public void toStore(Runnable back) {
+        StoreModel model = new StoreModel(workplace);
+        show(() -> new StoreView(workplace, model, back));
     }
 
     @Override

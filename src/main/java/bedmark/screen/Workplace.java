@@ -73,6 +73,11 @@ public final class Workplace implements AutoCloseable {
     /** Takes a register in. Runs beside the screen. */
     public void adopt(Act register) {
         store.append(preferences.get().person(), register);
+        reread();
+    }
+
+    /** Reads the plant anew, where it may have changed. Runs beside the screen. */
+    public void reread() {
         Optional<Site> read = readSite();
         screen.execute(() -> site.set(read));
     }

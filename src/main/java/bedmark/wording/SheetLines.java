@@ -9,6 +9,9 @@ import java.util.stream.Stream;
 final class SheetLines {
     private static final String INDENT = "  ";
     private static final String AFTER_NAME = "      ";
+    private static final int NAMES = 25;
+    private static final int RULES = 46;
+    private static final int LEADS = 11;
 
     private final int width;
     private final List<String> lines = new ArrayList<>();
@@ -21,29 +24,26 @@ final class SheetLines {
         return List.copyOf(lines);
     }
 
-    void heading(String text) {
-        lines.add(text);
-    }
-
-    /** A sentence from the edge. */
-    void sentence(String text) {
-        wrapped("", "", text);
-    }
-
-    /** A sentence in a list. */
-    void item(String text) {
-        wrapped(INDENT + "- ", INDENT + "  ", text);
-    }
-
-    /** Things one after the other. */
-    void flow(List<String> items) {
-        if (!items.isEmpty()) {
-            wrapped(INDENT, INDENT, String.join("; ", items));
+    void add(SheetPart part) {
+        if (part instanceof SheetPart.Heading heading) {
+            lines.add(heading.text());
+        } else if (part instanceof SheetPart.Sentence sentence) {
+            wrapped("", "", sentence.text());
+        } else if (part instanceof SheetPart.Item item) {
+            wrapped(INDENT + "- ", INDENT + "  ", item.text());
+        } else if (part instanceof SheetPart.Flow flow) {
+            if (!flow.items().isEmpty()) {
+                wrapped(INDENT, INDENT, String.join("; ", flow.items()));
+            }
+        } else if (part instanceof SheetPart.Row row) {
+            boolean plain = row.lead().isEmpty();
+            row(plain ? NAMES : RULES, plain ? row.name()
+                    : row.lead() + " ".repeat(Math.max(1, LEADS - row.lead().length())) + row.name(), row.text());
         }
     }
 
     /** A name in its column, and a text beside it; where that takes fewer lines, closer together. */
-    void row(int names, String name, String text) {
+    private void row(int names, String name, String text) {
         String head = INDENT + name + " ".repeat(Math.max(1, names - name.length() - INDENT.length()));
         String close = text.replace(" + ", "+").replace(", ", ",");
         Stream.of(broken(head, AFTER_NAME, text), broken(INDENT + name + " ", AFTER_NAME, text),

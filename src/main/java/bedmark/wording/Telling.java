@@ -106,19 +106,29 @@ public final class Telling {
 
     /** A number of a finding in the way in which its rule is spoken of. */
     public String observed(Finding finding, double number) {
-        if (finding.rule() == Rule.SEAL_DEFECT) {
+        return observed(finding.rule(), number);
+    }
+
+    private String observed(Rule rule, double number) {
+        if (rule == Rule.SEAL_DEFECT) {
             return wording.format().computed(number, 0);
         }
-        if (finding.rule() == Rule.BELT_TOO_FAST) {
+        if (rule == Rule.BELT_TOO_FAST) {
             return wording.computed(number, wording.unit(Dimension.SPEED));
         }
-        return TIMES.contains(finding.rule()) ? wording.format().computed(number, 1) : wording.percent(number);
+        return TIMES.contains(rule) ? wording.format().computed(number, 1) : wording.percent(number);
     }
 
     /** A limit of a finding in the way in which its rule is spoken of. */
     public String limit(Finding finding, double limit) {
         return TIMES.contains(finding.rule()) ? wording.format().exact(BigDecimal.valueOf(limit))
                 : observed(finding, limit);
+    }
+
+    /** A limit as it is set: that of the belt's speed is a share of the speed in its table. */
+    public String setLimit(Rule rule, double limit) {
+        return TIMES.contains(rule) ? wording.format().exact(BigDecimal.valueOf(limit))
+                : rule == Rule.BELT_TOO_FAST ? wording.percent(limit) : observed(rule, limit);
     }
 
     /** Nothing where the verdict rests on what is counted or seen, and not on a reading with an uncertainty. */

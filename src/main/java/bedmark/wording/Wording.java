@@ -169,7 +169,7 @@ public record Wording(Words words, UnitSystem units, Map<Unit, Unit> liked) {
     /** An argument of the engine for people: a number in the locale's form, a code in words. */
     private String spoken(String argument) {
         try {
-            return format().computed(Double.parseDouble(argument), 3);
+            return format().computed(Double.parseDouble(argument), argument.matches("[0-9]+") ? 0 : 3);
         } catch (NumberFormatException e) {
             String key = "assumption.word." + argument;
             return words.has(key) ? text(key) : argument;

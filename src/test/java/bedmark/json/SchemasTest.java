@@ -61,7 +61,7 @@ class SchemasTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"bundle", "assessment", "field-form", "reference-materials", "reference-limits",
-        "reference-seal-rates", "reference-speed-classes", "reference-instruments"})
+        "reference-seal-rates", "reference-speed-classes", "reference-instruments", "receipt"})
     void schemasAreOfTheNamedDraftAndLeaveRoomForUnknownKeys(String name) {
         assertEquals("https://json-schema.org/draft/2020-12/schema", schema(name).text("$schema").orElseThrow());
         requireRoom(schema(name));

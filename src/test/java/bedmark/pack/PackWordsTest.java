@@ -20,7 +20,7 @@ import org.junit.jupiter.api.Test;
 
 /** Every reason that this package gives has its sentence in both languages, and no sentence is left over. */
 class PackWordsTest {
-    private static final Pattern CODE = Pattern.compile("\"((pack|zip|bag|name|device-key)-[a-z0-9]+(-[a-z0-9]+)*)\"");
+    private static final Pattern CODE = Pattern.compile("\"((pack|zip|bag|name|device-key|receipt)-[a-z0-9]+(-[a-z0-9]+)*)\"");
 
     private static Set<String> codes() throws IOException {
         Set<String> codes = new TreeSet<>();

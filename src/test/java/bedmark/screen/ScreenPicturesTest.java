@@ -219,6 +219,9 @@ class ScreenPicturesTest {
         gloves("zone-overloaded");
         app.click("every-rule");
         take("zone-rules");
+        app.click("show-working");
+        take("zone-working");
+        app.click("working-close");
         app.click("rules-close");
         app.click("slot-readings-seals-0-type");
         take("zone-seals");

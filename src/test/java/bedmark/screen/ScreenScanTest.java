@@ -124,6 +124,7 @@ class ScreenScanTest {
             scan("depth", true);
             scan("belt", true, "belt-state");
             scan("rules", true, "every-rule");
+            scan("working", true, "every-rule", "show-working");
             app.click("slot-readings-seals-0-type");
             scan("seals", true);
             app.click("foot-notes");

@@ -29,7 +29,7 @@ import org.junit.jupiter.api.Test;
 
 /** The demo plant's sheets, as a person gets to read them. */
 class CalculationSheetTest {
-    private static final int PAGE = 110;
+    private static final int PAGE = 112;
     private static final Pattern KEY = Pattern.compile("(?:Formula\\.of|new Formula)\\(\"([a-z0-9-]+)\"");
 
     private static List<List<String>> sheets(String round, Locale language, UnitSystem units) throws IOException {
@@ -85,6 +85,20 @@ class CalculationSheetTest {
         String text = String.join("\n", sheets("round-2026-03.json", Words.LANGUAGES.get(1), UnitSystem.METRIC).get(1));
         assertTrue(text.contains("22620,59479·Cs·J2"), text);
         assertTrue(text.contains("max(") && text.contains("; "), text);
+    }
+
+    @Test
+    void methodsFeedsAndRemediesStandOnIt() throws IOException {
+        List<String> sheet = sheets("round-under-way.json", Locale.ENGLISH, UnitSystem.METRIC).stream()
+                .filter(lines -> String.join("", lines).contains("- Free the bed:")
+                        && lines.contains("  - At design feed: Overloaded."))
+                .findFirst().orElseThrow();
+        String text = String.join(" ", sheet).replaceAll("[ \u00a0\u202f]+", " ");
+        for (String part : List.of("Methods apart \\[D\\] [A-Za-z0-9 ]+ / [A-Za-z0-9 ]+ = [0-9.]+ = .*which depth is read ×",
+                "OVERLOADED Bed against the depth laid out .*over 1.25 \\(100 %\\), at design 1.9 OVERLOADED",
+                "nd of 2 = 2, near 0", "- Free the bed: .* F = [0-9.]+ N \\([0-9.]+ lbf\\); Pd = [0-9.]+ W")) {
+            assertTrue(Pattern.compile(part).matcher(text).find(), part + " in " + text);
+        }
     }
 
     @Test

@@ -96,7 +96,7 @@ final class SealBoxes extends VBox {
 
     private PadWords words() {
         return new PadWords(wording.text("screen.pad.back"), wording.text("screen.pad.next"),
-                wording.text("screen.pad.undo"), wording.text("screen.pad.backspace"),
+                wording.text("zone.history"), wording.text("screen.pad.undo"), wording.text("screen.pad.backspace"),
                 wording.text("screen.pad.decimal"), wording.text("screen.pad.fraction"),
                 wording.text("screen.pad.sign"), note -> wording.text("screen.pad.note." + note.code()));
     }

@@ -226,7 +226,10 @@ public final class StartView extends SidedScreen {
         start.disableProperty().bind(model.ready().not());
         Label version = new Label(wording.text("screen.notice-short"));
         version.setWrapText(true);
-        return new FootBar(Optional.empty(), Optional.of(version), Optional.of(start));
+        ActionButton store = new ActionButton(Weight.QUIET, wording.text("store.title"),
+                () -> navigator.toStore(navigator::toStart));
+        store.setId("to-store");
+        return new FootBar(Optional.of(store), Optional.of(version), Optional.of(start));
     }
 
     private void start() {

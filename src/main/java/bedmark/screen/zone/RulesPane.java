@@ -23,7 +23,7 @@ import javafx.scene.layout.VBox;
 /** Every rule that was judged, the worst first: what was observed, its limits, how likely it is over them. */
 final class RulesPane extends VBox {
 
-    RulesPane(Assessment found, Wording wording, FieldForm form, Runnable close) {
+    RulesPane(Assessment found, Wording wording, FieldForm form, Runnable working, Runnable close) {
         getStyleClass().add("rules");
         Telling telling = new Telling(wording, form);
         VBox list = new VBox();
@@ -47,7 +47,10 @@ final class RulesPane extends VBox {
         ActionButton back = new ActionButton(Weight.PLAIN, wording.text("screen.rules.close"), close);
         back.setId("rules-close");
         back.setMaxWidth(Double.MAX_VALUE);
-        getChildren().addAll(new SectionHeader(wording.text("screen.rules.title")), scroll, back);
+        ActionButton show = new ActionButton(Weight.PLAIN, wording.text("working.show"), working);
+        show.setId("show-working");
+        show.setMaxWidth(Double.MAX_VALUE);
+        getChildren().addAll(new SectionHeader(wording.text("screen.rules.title")), scroll, show, back);
     }
 
     private static HBox row(Finding finding, Telling telling, Wording wording) {

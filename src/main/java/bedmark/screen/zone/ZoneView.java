@@ -37,6 +37,7 @@ import bedmark.survey.Survey;
 import bedmark.wording.Telling;
 import bedmark.wording.Told;
 import bedmark.wording.Wording;
+import bedmark.wording.ZoneSketcher;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
@@ -59,6 +60,7 @@ public final class ZoneView implements Screen {
     private final Wording wording;
     private final Listening listening = new Listening();
     private final FormPane form;
+    private final HistoryPopOver history;
     private final EntryPane entry;
     private final ZonePictureView picture;
     private final VerdictBlock verdict;
@@ -68,6 +70,7 @@ public final class ZoneView implements Screen {
     private final VBox head;
     private final javafx.scene.Node foot;
     private final boolean large;
+    private boolean portrait;
     private Optional<Branch> pulled = Optional.empty();
 
     public ZoneView(Workplace workplace, ZoneModel model, RoundModel round, Navigator navigator, Density density) {
@@ -80,8 +83,9 @@ public final class ZoneView implements Screen {
         model.unitsProperty().set(wording.units());
         model.localeProperty().set(wording.words().locale());
         model.likeUnits(wording::liked);
-        this.form = new FormPane(model, wording, listening);
-        this.entry = new EntryPane(model, wording, listening);
+        this.form = new FormPane(model, wording, listening, large);
+        this.history = new HistoryPopOver(model, wording);
+        this.entry = new EntryPane(model, wording, listening, this::showHistory);
         this.picture = new ZonePictureView(sketch(model.surveyProperty().get()), density, new BedPull());
         this.verdict = new VerdictBlock(Optional.of(judgedButton()));
         this.head = Heads.head(workplace, listening, tag(), title(), beltButton());
@@ -155,21 +159,24 @@ public final class ZoneView implements Screen {
     }
 
     private void showRules() {
-        model.outcomeProperty().get().assessment().ifPresent(found -> {
-            RulesPane rules = new RulesPane(found, wording, model.setting().form(), this::hideRules);
-            result.getChildren().setAll(rules);
-            if (large) {
-                result.getChildren().add(0, form.caution());
-            }
-            VBox.setVgrow(rules, Priority.ALWAYS);
-        });
+        model.outcomeProperty().get().assessment().ifPresent(found -> showInstead(new RulesPane(found, wording,
+                model.setting().form(), this::showWorking, this::hideRules)));
+    }
+
+    private void showWorking() {
+        model.outcomeProperty().get().assessment().ifPresent(found -> showInstead(new WorkingPane(model.setting(),
+                new Survey(model.surveyProperty().get()), found, wording, this::showRules)));
+    }
+
+    private void showInstead(Region pane) {
+        result.getChildren().setAll(form.elsewhere());
+        result.getChildren().add(pane);
+        VBox.setVgrow(pane, Priority.ALWAYS);
     }
 
     private void hideRules() {
-        result.getChildren().setAll(picture, verdict);
-        if (large) {
-            result.getChildren().add(0, form.caution());
-        }
+        result.getChildren().setAll(form.elsewhere());
+        result.getChildren().addAll(picture, verdict);
     }
 
     private FootBar footBar() {
@@ -206,6 +213,10 @@ public final class ZoneView implements Screen {
         entry.focusText();
     }
 
+    private void showHistory() {
+        form.activeBox().ifPresent(box -> history.show(model.active(), box, portrait));
+    }
+
     /** Completes this survey and goes on, or stays at the first gap. */
     private void onward(Optional<RoundRow> next) {
         if (model.open() && !model.complete(workplace.preferences().person())) {
@@ -216,7 +227,7 @@ public final class ZoneView implements Screen {
     }
 
     private ZoneSketch sketch(Branch document) {
-        return new ZoneSketcher(model.setting(), wording).sketch(document,
+        return new ZoneSketcher(model.setting().assessor(), wording).sketch(document,
                 model.outcomeProperty().get().assessment(), activeLine());
     }
 
@@ -292,12 +303,12 @@ public final class ZoneView implements Screen {
                     : Quantity.of(BigDecimal.ZERO, Unit.METRE);
             if (phase == Phase.RELEASED) {
                 pulled = Optional.empty();
-                model.pull(line, position, quantity(depth));
+                model.tables().pull(line, position, quantity(depth));
                 return;
             }
-            Branch seen = model.previewPull(line, position, quantity(depth));
+            Branch seen = model.tables().previewPull(line, position, quantity(depth));
             pulled = Optional.of(seen);
-            picture.show(new ZoneSketcher(model.setting(), wording).sketch(seen,
+            picture.show(new ZoneSketcher(model.setting().assessor(), wording).sketch(seen,
                     model.outcomeProperty().get().assessment(), Optional.of(line)), snap());
         }
 
@@ -335,7 +346,9 @@ public final class ZoneView implements Screen {
     }
 
     @Override
-    public void turned(boolean portrait) {
+    public void turned(boolean upright) {
+        portrait = upright;
+        history.hide();
         body.setLeft(null);
         body.setTop(null);
         body.setCenter(null);
@@ -349,8 +362,6 @@ public final class ZoneView implements Screen {
             body.setCenter(result);
         }
         entry.turned(portrait);
-        result.getChildren().remove(form.caution());
-        form.shrink(large);
         hideRules();
         focusActive();
     }
@@ -362,6 +373,7 @@ public final class ZoneView implements Screen {
 
     @Override
     public void left() {
+        history.hide();
         model.keep();
         listening.end();
     }

@@ -1,0 +1,54 @@
+package bedmark.index.office;
+
+import bedmark.document.Pointer;
+import bedmark.survey.InspectionStatus;
+import bedmark.survey.merge.Copy;
+import bedmark.survey.merge.Origin;
+import bedmark.survey.merge.ZoneId;
+import java.sql.ResultSet;
+import java.sql.SQLException;
+import java.util.Optional;
+import java.util.OptionalLong;
+import java.util.UUID;
+
+/**
+ * A content of a survey to be taken in.
+ *
+ * @param pack    digest of the pack that it came in, which holds its photos
+ * @param content the survey's document
+ */
+public record CopyRow(Copy copy, String pack, byte[] content) {
+    static final String COLUMNS =
+            "digest, id, revision, supersedes, zone, round, status, begun, finished, made, register, conveyor";
+    static final String INSERT = "insert into survey (" + COLUMNS + ", drive, pack, content) "
+            + "values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)";
+
+    Object[] values() {
+        Origin origin = copy.origin();
+        return new Object[] {copy.digest(), copy.id(), copy.revision(), copy.supersedes().orElse(null),
+            copy.zone().key(), copy.round(), copy.status().name(), boxed(copy.begun()), boxed(copy.finished()),
+            origin.createdAt(), origin.register(), origin.conveyor(), drive(copy), pack, content};
+    }
+
+    /** What loads one drive together: the zones of one conveyor on one round. */
+    static String drive(Copy copy) {
+        return Pointer.of(copy.zone().plant(), copy.round(), copy.origin().conveyor()).toString();
+    }
+
+    static Copy read(ResultSet row) throws SQLException {
+        return new Copy(row.getString("digest"), row.getObject("id", UUID.class), row.getInt("revision"),
+                Optional.ofNullable(row.getObject("supersedes", UUID.class)), ZoneId.ofKey(row.getString("zone")),
+                row.getString("round"), InspectionStatus.valueOf(row.getString("status")), number(row, "begun"),
+                number(row, "finished"), new Origin(row.getLong("made"), row.getString("register"),
+                row.getString("conveyor")));
+    }
+
+    static Object boxed(OptionalLong value) {
+        return value.isPresent() ? (Object) value.getAsLong() : null;
+    }
+
+    static OptionalLong number(ResultSet row, String column) throws SQLException {
+        long value = row.getLong(column);
+        return row.wasNull() ? OptionalLong.empty() : OptionalLong.of(value);
+    }
+}

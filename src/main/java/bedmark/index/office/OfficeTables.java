@@ -1,0 +1,335 @@
+package bedmark.index.office;
+
+import bedmark.survey.merge.Copy;
+import bedmark.survey.merge.ZoneId;
+import java.nio.file.Path;
+import java.sql.ResultSet;
+import java.sql.SQLException;
+import java.util.Arrays;
+import java.util.Collection;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.TreeSet;
+import java.util.UUID;
+import java.util.function.Supplier;
+
+/** The office's tables, by what the office does with them. Used by one thread. */
+public final class OfficeTables implements AutoCloseable {
+
+    /** The version of the tables: the number of the last migration. */
+    static final String SCHEMA = "1";
+    private static final String DEED = "insert into deed (seq, made_at, person, device, code, payload) "
+            + "values (?, ?, ?, ?, ?, ?)";
+    private static final String MOVED = "update survey set made = ?, register = ?, conveyor = ?, drive = ? "
+            + "where digest = ?";
+    private static final String NAMED = "update zone set plant_name = ?, area = ?, conveyor = ?, conveyor_tag = ?, "
+            + "tag = ?, asset = ?, material = ?, registered = ? where zone = ?";
+    private static final String NEW_ZONE = "insert into zone (plant_name, area, conveyor, conveyor_tag, tag, asset, "
+            + "material, registered, zone, plant, transfer, clashes, clock_wrong, judged) "
+            + "values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, 0, false, true)";
+    private static final String STANDS = "update zone set visit = ?, visit_status = ?, visited = ?, latest = ?, "
+            + "moment = ?, clashes = ?, clock_wrong = ?, judged = ?, level = null where zone = ?";
+    private static final String JUDGED = "update zone set judged = true, level = ?, incomplete = ?, drive_share = ?, "
+            + "skirt_power = ?, saving_wh = ?, saving_cost = ?, saving_co2 = ?, remedy = ?, energy_wh = ?, cost = ?, "
+            + "co2 = ?, energy_kind = ?, currency = ?, findings = ? where zone = ?";
+
+    private final Link link;
+    private final boolean server;
+
+    private OfficeTables(Link link, boolean server) {
+        this.link = link;
+        this.server = server;
+    }
+
+    /** Whether a text names a database server rather than a folder. */
+    public static boolean isServer(String url) {
+        return OfficeDatabase.server(url);
+    }
+
+    /** The tables of a folder, made where there are none. */
+    public static OfficeTables of(Path folder) {
+        return new OfficeTables(OfficeDatabase.open(OfficeDatabase.url(folder)), false);
+    }
+
+    /** The tables of a database server. */
+    public static OfficeTables of(String url) {
+        return new OfficeTables(OfficeDatabase.open(url), true);
+    }
+
+    /** Does work whole, or not at all. */
+    public <T> T whole(Supplier<T> work) {
+        return link.whole(work);
+    }
+
+    /** Waits until no other desk writes; it holds until the work that it stands in is done. */
+    public void alone() {
+        if (server) {
+            link.rows("select content from settings where name = 'schema' for update", row -> row.getString(1));
+        }
+    }
+
+    public Optional<String> setting(String name) {
+        return link.rows("select content from settings where name = ?", row -> row.getString(1), name).stream()
+                .findFirst();
+    }
+
+    public void set(String name, String content) {
+        if (link.run("update settings set content = ? where name = ?", content, name) == 0) {
+            link.run("insert into settings (name, content) values (?, ?)", name, content);
+        }
+    }
+
+    /** The number of the last deed; 0 where there is none. */
+    public long lastDeed() {
+        return link.rows("select coalesce(max(seq), 0) from deed", row -> row.getLong(1)).get(0);
+    }
+
+    public void add(DeedRow deed) {
+        link.run(DEED, deed.sequence(), deed.at(), deed.person(), deed.device(), deed.code(), deed.payload());
+    }
+
+    /** The deeds of one kind after a number, in their order. */
+    public List<DeedRow> deeds(Collection<String> codes, long after) {
+        return link.rows("select seq, made_at, person, device, code, payload from deed where code = any(?) and seq > ? "
+                + "order by seq", row -> new DeedRow(row.getLong(1), row.getString(2), row.getString(3),
+                row.getObject(4, UUID.class), row.getString(5), row.getBytes(6)), link.texts(codes), after);
+    }
+
+    public boolean hasPack(String sha256) {
+        return !link.rows("select 1 from pack where sha256 = ?", row -> row.getInt(1), sha256).isEmpty();
+    }
+
+    /** @param content the pack itself, where no folder holds it */
+    public void addPack(String sha256, long sequence, Optional<byte[]> content) {
+        link.run("insert into pack (sha256, seq, content) values (?, ?, ?)", sha256, sequence, content.orElse(null));
+    }
+
+    /** A pack's bytes, where the tables hold them. */
+    public Optional<byte[]> pack(String sha256) {
+        return link.rows("select content from pack where sha256 = ?", row -> Optional.ofNullable(row.getBytes(1)),
+                sha256).stream().flatMap(Optional::stream).findFirst();
+    }
+
+    public Optional<PlantRow> plant(String id) {
+        return link.rows("select id, made, own, digest, register, content from plant where id = ?",
+                OfficeTables::plant, id).stream().findFirst();
+    }
+
+    public List<PlantRow> plants() {
+        return link.rows("select id, made, own, digest, register, content from plant order by id",
+                OfficeTables::plant);
+    }
+
+    private static PlantRow plant(ResultSet row) throws SQLException {
+        return new PlantRow(row.getString(1), row.getLong(2), row.getBoolean(3), row.getString(4), row.getString(5),
+                row.getBytes(6));
+    }
+
+    public void put(PlantRow plant) {
+        link.run("delete from plant where id = ?", plant.id());
+        link.run("insert into plant (id, made, own, digest, register, content) values (?, ?, ?, ?, ?, ?)", plant.id(),
+                plant.made(), plant.own(), plant.digest(), plant.register(), plant.content());
+    }
+
+    /** Keeps a version of a register; nothing happens where it is there. */
+    public void addRegister(String digest, String plant, byte[] content) {
+        if (link.rows("select 1 from register where digest = ?", row -> row.getInt(1), digest).isEmpty()) {
+            link.run("insert into register (digest, plant, content) values (?, ?, ?)", digest, plant, content);
+        }
+    }
+
+    public Optional<byte[]> register(String digest) {
+        return link.rows("select content from register where digest = ?", row -> row.getBytes(1), digest).stream()
+                .findFirst();
+    }
+
+    /** The digests of all versions of registers. */
+    public List<String> registers() {
+        return link.rows("select digest from register order by plant, digest", row -> row.getString(1));
+    }
+
+    /**
+     * Takes contents in; those that are there are not touched, but may turn out to have left their tablet earlier.
+     *
+     * @return the digests of those that are new or turned out so
+     */
+    public Set<String> add(List<CopyRow> rows) {
+        Map<String, CopyRow> fresh = new LinkedHashMap<>();
+        rows.forEach(row -> fresh.putIfAbsent(row.copy().digest(), row));
+        Map<String, Copy> known = new HashMap<>();
+        link.rows("select " + CopyRow.COLUMNS + " from survey where digest = any(?)", CopyRow::read,
+                link.texts(fresh.keySet())).forEach(copy -> known.put(copy.digest(), copy));
+        Set<String> touched = new HashSet<>();
+        for (CopyRow row : rows) {
+            Copy before = known.get(row.copy().digest());
+            if (before != null && move(before, before.or(row.copy()))) {
+                touched.add(before.digest());
+            }
+        }
+        fresh.keySet().removeAll(known.keySet());
+        fresh.values().forEach(row -> link.batch(CopyRow.INSERT, row.values()));
+        link.runBatch(CopyRow.INSERT);
+        touched.addAll(fresh.keySet());
+        return touched;
+    }
+
+    private boolean move(Copy before, Copy after) {
+        if (after.equals(before)) {
+            return false;
+        }
+        link.run(MOVED, after.origin().createdAt(), after.origin().register(), after.origin().conveyor(),
+                CopyRow.drive(after), after.digest());
+        stale(List.of(CopyRow.drive(before), CopyRow.drive(after)));
+        return true;
+    }
+
+    /** Everything that came about some zones. */
+    public List<Copy> copies(Collection<ZoneId> zones) {
+        return link.rows("select " + CopyRow.COLUMNS + " from survey where zone = any(?)", CopyRow::read,
+                link.texts(zones.stream().map(ZoneId::key).toList()));
+    }
+
+    /** Everything that came, by digest. */
+    public List<Copy> copies() {
+        return link.rows("select " + CopyRow.COLUMNS + " from survey order by zone, id, revision, digest",
+                CopyRow::read);
+    }
+
+    /** What loaded the same drives as some contents. */
+    public List<Copy> companions(Collection<Copy> copies) {
+        return link.rows("select " + CopyRow.COLUMNS + " from survey where drive = any(?)", CopyRow::read,
+                link.texts(copies.stream().map(CopyRow::drive).distinct().toList()));
+    }
+
+    /** The contents with those digests. */
+    public Map<String, Copy> copiesOf(Collection<String> digests) {
+        Map<String, Copy> copies = new HashMap<>();
+        link.rows("select " + CopyRow.COLUMNS + " from survey where digest = any(?)", CopyRow::read,
+                link.texts(digests)).forEach(copy -> copies.put(copy.digest(), copy));
+        return copies;
+    }
+
+    /** The documents with those digests. */
+    public Map<String, byte[]> contents(Collection<String> digests) {
+        Map<String, byte[]> contents = new HashMap<>();
+        link.rows("select digest, content from survey where digest = any(?)", row ->
+                contents.put(row.getString(1), row.getBytes(2)), link.texts(digests));
+        return contents;
+    }
+
+    /** The pack that a content came in. */
+    public Optional<String> packOf(String digest) {
+        return link.rows("select pack from survey where digest = ?", row -> row.getString(1), digest).stream()
+                .findFirst();
+    }
+
+    /** What was judged of zones whose latest result loaded one of these drives no longer holds. */
+    public void staleDrives(Collection<Copy> copies) {
+        stale(copies.stream().map(CopyRow::drive).distinct().toList());
+    }
+
+    private void stale(Collection<String> drives) {
+        link.run("update zone set judged = false where latest in (select digest from survey where drive = any(?))",
+                link.texts(drives));
+    }
+
+    /** Names zones; those that are not there are made, those of the plant that are not named are out of register. */
+    public void name(String plant, String plantName, Collection<ZoneNames> zones) {
+        Set<String> known = new HashSet<>(link.rows("select zone from zone where plant = ?", row -> row.getString(1),
+                plant));
+        link.run("update zone set registered = false, plant_name = ?, area = '', conveyor = '', conveyor_tag = '', "
+                + "tag = transfer, asset = '', material = '' where plant = ?", plantName, plant);
+        for (ZoneNames names : zones) {
+            Object[] own = {names.plant(), names.area(), names.conveyor(), names.conveyorTag(), names.tag(),
+                names.asset(), names.material(), names.registered()};
+            if (known.contains(names.zone().key())) {
+                link.batch(NAMED, with(own, names.zone().key()));
+            } else {
+                link.batch(NEW_ZONE, with(own, names.zone().key(), names.zone().plant(), names.zone().transfer()));
+            }
+        }
+        link.runBatch(NAMED);
+        link.runBatch(NEW_ZONE);
+    }
+
+    private static Object[] with(Object[] some, Object... more) {
+        Object[] all = Arrays.copyOf(some, some.length + more.length);
+        System.arraycopy(more, 0, all, some.length, more.length);
+        return all;
+    }
+
+    /** Makes rows for those of the zones that have none: today's register does not name them. */
+    public void addUnnamed(Collection<ZoneId> zones, String plantName) {
+        Set<ZoneId> unnamed = new TreeSet<>(zones);
+        link.rows("select zone from zone where zone = any(?)", row -> ZoneId.ofKey(row.getString(1)),
+                link.texts(zones.stream().map(ZoneId::key).toList())).forEach(unnamed::remove);
+        unnamed.forEach(zone -> link.batch(NEW_ZONE, plantName, "", "", "", zone.transfer(), "", "", false, zone.key(),
+                zone.plant(), zone.transfer()));
+        link.runBatch(NEW_ZONE);
+    }
+
+    /** Says what counts of zones; they wait to be judged where there is something to judge. */
+    public void put(Collection<Standing> standings) {
+        for (Standing zone : standings) {
+            link.batch(STANDS, zone.visit().orElse(null), zone.visitStatus().map(Enum::name).orElse(null),
+                    CopyRow.boxed(zone.visited()), zone.latest().orElse(null), CopyRow.boxed(zone.moment()),
+                    zone.clashes(), zone.clockWrong(), zone.latest().isEmpty(), zone.zone().key());
+        }
+        link.runBatch(STANDS);
+    }
+
+    /** Zones that wait to be judged, at most so many. */
+    public List<ZoneId> waiting(int atMost) {
+        return link.rows("select zone from zone where judged = false order by zone limit ?",
+                row -> ZoneId.ofKey(row.getString(1)), atMost);
+    }
+
+    public long countWaiting() {
+        return link.rows("select count(*) from zone where judged = false", row -> row.getLong(1)).get(0);
+    }
+
+    /** Keeps what was judged; nothing for a zone that can't be. */
+    public void judge(Map<ZoneId, Optional<Verdict>> verdicts) {
+        verdicts.forEach((zone, judged) -> link.batch(JUDGED, judged.map(OfficeTables::values)
+                .map(values -> with(values, zone.key())).orElseGet(() -> with(new Object[14], zone.key()))));
+        link.runBatch(JUDGED);
+    }
+
+    private static Object[] values(Verdict verdict) {
+        return new Object[] {verdict.level(), verdict.incomplete(), real(verdict.driveShare()),
+            real(verdict.skirtPower()), real(verdict.savingWh()), real(verdict.savingCost()),
+            real(verdict.savingCo2()), verdict.remedy().orElse(null), real(verdict.energyWh()), real(verdict.cost()),
+            real(verdict.co2()), verdict.energyKind().orElse(null), verdict.currency().orElse(null),
+            verdict.findings()};
+    }
+
+    private static Object real(OptionalDouble value) {
+        return value.isPresent() ? (Object) value.getAsDouble() : null;
+    }
+
+    /** Every zone as it stands. */
+    public List<ZoneRow> zones() {
+        return link.rows("select " + ZoneRow.COLUMNS + " from zone", ZoneRow::read);
+    }
+
+    public Optional<ZoneRow> zone(ZoneId zone) {
+        return link.rows("select " + ZoneRow.COLUMNS + " from zone where zone = ?", ZoneRow::read, zone.key()).stream()
+                .findFirst();
+    }
+
+    /** How many contents of surveys there are. */
+    public long countCopies() {
+        return link.rows("select count(*) from survey", row -> row.getLong(1)).get(0);
+    }
+
+    @Override
+    public void close() {
+        link.close();
+    }
+}

@@ -1,0 +1,39 @@
+package bedmark.json;
+
+import bedmark.document.Branch;
+import bedmark.document.Refused;
+
+/** Reads the text of an office's receipt: strict JSON, the published schema. What it proves is another question. */
+public final class ReceiptText {
+
+    /** The format's name. */
+    public static final String FORMAT = "bedmark.receipt";
+    /** The version that this program writes. */
+    public static final int VERSION = 1;
+
+    private ReceiptText() {
+    }
+
+    private static final class Compiled {
+        private static final SchemaCheck SCHEMA = new SchemaCheck("receipt.schema.json");
+    }
+
+    /**
+     * Reads a receipt.
+     *
+     * @param bytes UTF-8
+     * @throws Refused where it is none, of another version, or holds something impossible
+     */
+    public static Branch read(byte[] bytes) {
+        Document document = JsonReader.read(bytes);
+        try {
+            FormatCheck.require(document.root(), FORMAT, VERSION);
+            Compiled.SCHEMA.check(document).stream().findFirst().ifPresent(defect -> {
+                throw new Refused(defect);
+            });
+            return document.root();
+        } catch (Refused e) {
+            throw new Refused(document.placed(e.defect()), e);
+        }
+    }
+}

@@ -1,0 +1,238 @@
+package bedmark.office;
+
+import bedmark.document.Defect;
+import bedmark.document.Refused;
+import bedmark.index.office.DeedRow;
+import bedmark.index.office.OfficeBroken;
+import bedmark.index.office.OfficeTables;
+import bedmark.journal.Digest;
+import bedmark.journal.Fault;
+import bedmark.journal.FileLayer;
+import bedmark.journal.Journal;
+import bedmark.journal.Mark;
+import bedmark.journal.Place;
+import bedmark.journal.Replay;
+import bedmark.json.EntryCodec;
+import bedmark.survey.Act;
+import bedmark.survey.Entry;
+import java.io.IOException;
+import java.nio.file.Path;
+import java.time.OffsetDateTime;
+import java.util.ArrayList;
+import java.util.HexFormat;
+import java.util.List;
+import java.util.Optional;
+import java.util.UUID;
+import java.util.function.BooleanSupplier;
+import java.util.function.Supplier;
+
+/** An office of its own in a folder: the journal is the truth, the tables are made anew from it where they fail. */
+final class FolderBooks implements Books {
+    static final String JOURNAL = "journal";
+    static final String INDEX = "index";
+    private static final long SEGMENT_BYTES = 64L << 20;
+    private static final String MARK = "mark";
+
+    private final Path folder;
+    private final OfficeOptions options;
+    private final FileLayer files;
+    private final UUID device;
+    private final Effect effect;
+    private final List<Defect> found = new ArrayList<>();
+    private Optional<OfficeTables> tables = Optional.empty();
+    private Optional<Journal> journal = Optional.empty();
+    private boolean rebuilt;
+
+    private FolderBooks(Path folder, OfficeOptions options, UUID device, Effect effect) {
+        this.folder = folder;
+        this.options = options;
+        this.files = options.files();
+        this.device = device;
+        this.effect = effect;
+    }
+
+    static FolderBooks open(Path folder, OfficeOptions options, UUID device, Effect effect, boolean afresh)
+            throws IOException {
+        FolderBooks books = new FolderBooks(folder, options, device, effect);
+        try {
+            books.open(afresh);
+            return books;
+        } catch (IOException | RuntimeException e) {
+            books.close();
+            throw e;
+        }
+    }
+
+    private void open(boolean afresh) throws IOException {
+        files.createFolder(folder.resolve(INDEX));
+        if (afresh) {
+            drop();
+        }
+        Optional<Mark> mark = Optional.empty();
+        try {
+            tables = Optional.of(OfficeTables.of(folder.resolve(INDEX)));
+            mark = tables().setting(MARK).map(FolderBooks::readMark);
+        } catch (OfficeBroken | IllegalArgumentException e) {
+            drop();
+            tables = Optional.of(OfficeTables.of(folder.resolve(INDEX)));
+        }
+        Journal opened = Journal.open(folder.resolve(JOURNAL), files, SEGMENT_BYTES, mark, options.progress(),
+                new CatchUp());
+        journal = Optional.of(opened);
+        found.addAll(opened.found());
+    }
+
+    /** Brings the tables up to the journal while that is opened. */
+    private final class CatchUp implements Replay {
+        private UUID identity = new UUID(0, 0);
+
+        @Override
+        public void begin(UUID journalIdentity, boolean resumed) {
+            identity = journalIdentity;
+            if (!resumed && tables().lastDeed() > 0) {
+                rebuilt = true;
+                try {
+                    drop();
+                } catch (IOException e) {
+                    throw new Refused(Fault.defect("store", e, files, folder), e);
+                }
+                tables = Optional.of(OfficeTables.of(folder.resolve(INDEX)));
+            }
+        }
+
+        @Override
+        public void entry(long sequence, Place place, byte[] payload) {
+            Entry entry;
+            try {
+                entry = EntryCodec.read(payload);
+            } catch (Refused e) {
+                found.add(Defect.in(JOURNAL, "journal-entry-unknown", Long.toString(place.offset()),
+                        Long.toString(sequence)));
+                return;
+            }
+            try {
+                take(entry, new Mark(identity, sequence, place), Optional.empty());
+            } catch (Refused e) {
+                // A pack that can no longer be read: what it brought is missing, and everything else is not.
+                found.add(e.defect());
+                note(entry, new Mark(identity, sequence, place));
+            }
+        }
+    }
+
+    private void take(Entry entry, Mark mark, Optional<Intake> intake) {
+        tables().whole(() -> {
+            tables().add(row(entry));
+            effect.of(tables(), entry, intake);
+            tables().set(MARK, write(mark));
+            return true;
+        });
+    }
+
+    private void note(Entry entry, Mark mark) {
+        tables().whole(() -> {
+            tables().add(row(entry));
+            tables().set(MARK, write(mark));
+            return true;
+        });
+    }
+
+    static DeedRow row(Entry entry) {
+        return new DeedRow(entry.sequence(), entry.at().toString(), entry.person(), entry.device(),
+                entry.act().code(), EntryCodec.write(entry));
+    }
+
+    private static String write(Mark mark) {
+        Place place = mark.place();
+        return String.join(" ", mark.journal().toString(), Long.toString(mark.sequence()),
+                Integer.toString(place.segment()), Long.toString(place.offset()), Integer.toString(place.length()),
+                place.hash().hex());
+    }
+
+    private static Mark readMark(String text) {
+        String[] parts = text.split(" ");
+        if (parts.length != 6) {
+            throw new IllegalArgumentException("no mark: " + text);
+        }
+        return new Mark(UUID.fromString(parts[0]), Long.parseLong(parts[1]), new Place(Integer.parseInt(parts[2]),
+                Long.parseLong(parts[3]), Integer.parseInt(parts[4]),
+                Digest.ofBytes(HexFormat.of().parseHex(parts[5]))));
+    }
+
+    private void drop() throws IOException {
+        tables.ifPresent(FolderBooks::closeQuietly);
+        tables = Optional.empty();
+        for (Path file : files.list(folder.resolve(INDEX))) {
+            files.delete(file);
+        }
+    }
+
+    private static void closeQuietly(OfficeTables broken) {
+        try {
+            broken.close();
+        } catch (OfficeBroken e) {
+            // It is thrown away.
+            return;
+        }
+    }
+
+    @Override
+    public Optional<Entry> keep(BooleanSupplier needless, Deed deed) {
+        if (ask(needless::getAsBoolean)) {
+            return Optional.empty();
+        }
+        Journal.Saved saved = journal.orElseThrow().append(OffsetDateTime.now(options.clock()), deed.person(), device,
+                new Act.OfficeActed(deed.deed()));
+        Mark mark = new Mark(journal.orElseThrow().identity(), saved.entry().sequence(), saved.place());
+        try {
+            take(saved.entry(), mark, deed.intake());
+        } catch (OfficeBroken e) {
+            rebuild();
+        }
+        return Optional.of(saved.entry());
+    }
+
+    @Override
+    public <T> T ask(Supplier<T> question) {
+        try {
+            return tables().whole(question);
+        } catch (OfficeBroken e) {
+            rebuild();
+        }
+        return tables().whole(question);
+    }
+
+    private void rebuild() {
+        try {
+            journal.ifPresent(Journal::close);
+            journal = Optional.empty();
+            rebuilt = true;
+            open(true);
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("store", e, files, folder), e);
+        }
+    }
+
+    /** Whether the tables were made anew. */
+    boolean rebuilt() {
+        return rebuilt;
+    }
+
+    /** What was not as it was written. */
+    List<Defect> found() {
+        return List.copyOf(found);
+    }
+
+    @Override
+    public OfficeTables tables() {
+        return tables.orElseThrow(() -> new IllegalStateException("the office's tables are closed"));
+    }
+
+    @Override
+    public void close() {
+        tables.ifPresent(FolderBooks::closeQuietly);
+        tables = Optional.empty();
+        journal.ifPresent(Journal::close);
+        journal = Optional.empty();
+    }
+}

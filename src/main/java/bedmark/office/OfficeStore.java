@@ -1,0 +1,524 @@
+package bedmark.office;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Refused;
+import bedmark.index.Desk;
+import bedmark.index.Device;
+import bedmark.index.DeviceFile;
+import bedmark.index.office.OfficeBroken;
+import bedmark.index.office.OfficeTables;
+import bedmark.index.office.Verdict;
+import bedmark.index.office.ZoneRow;
+import bedmark.journal.Fault;
+import bedmark.journal.FileLayer;
+import bedmark.journal.Progress;
+import bedmark.json.BundleReader;
+import bedmark.json.JsonReader;
+import bedmark.office.FlatColumn.FlatRow;
+import bedmark.pack.DeviceKey;
+import bedmark.pack.PackReader;
+import bedmark.pack.ReadPack;
+import bedmark.pack.Receipt;
+import bedmark.pack.ReceiptWriter;
+import bedmark.survey.Act;
+import bedmark.survey.Entry;
+import bedmark.survey.OfficeDeed;
+import bedmark.survey.Register;
+import bedmark.survey.Survey;
+import bedmark.survey.merge.Clash;
+import bedmark.survey.merge.Copy;
+import bedmark.survey.merge.Merge;
+import bedmark.survey.merge.MergedZone;
+import bedmark.survey.merge.ZoneId;
+import java.io.Closeable;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.time.Duration;
+import java.time.OffsetDateTime;
+import java.time.ZonedDateTime;
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.SortedMap;
+import java.util.TreeMap;
+import java.util.UUID;
+import java.util.concurrent.atomic.AtomicBoolean;
+import java.util.function.Function;
+
+/**
+ * The office's store: in one folder {@code journal/} and {@code packs/} are the truth and {@code index/} can be thrown
+ * away. All methods may be called from any thread; they wait for the store's own.
+ */
+public final class OfficeStore implements AutoCloseable {
+    private static final String LOCK = "store.lock";
+    private static final String PACKS = "packs";
+    private static final String OFFICE = "office.json";
+    private static final int JUDGED_AT_ONCE = 500;
+
+    private final Path folder;
+    private final OfficeOptions options;
+    private final Desk desk;
+    private final Closeable lock;
+    private final PackShelf shelf;
+    private final Device device;
+    private final Books books;
+    private final Judge judge;
+    private Minutes minutes = new Minutes();
+    private final AtomicBoolean closed = new AtomicBoolean();
+
+    private OfficeStore(Path folder, OfficeOptions options, Desk desk, Closeable lock, boolean afresh)
+            throws IOException {
+        this.folder = folder;
+        this.options = options;
+        this.desk = desk;
+        this.lock = lock;
+        this.shelf = new PackShelf(folder.resolve(PACKS), options.files());
+        shelf.open();
+        DeviceFile file = new DeviceFile(folder, options.files(), OFFICE);
+        Optional<Device> known = file.read();
+        this.device = known.isPresent() ? known.get() : file.write(Optional.empty(), options.name());
+        this.books = FolderBooks.open(folder, options, device.id(), new Effects(shelf, options.limits(),
+                this::minutes), afresh);
+        this.judge = new Judge(this::version);
+    }
+
+    /**
+     * Opens an office store, and makes it where the folder is empty or missing.
+     *
+     * @throws Refused {@code store-locked} where another program has it open, {@code store-of-tablet} where it is the
+     *                 store of a tablet, {@code store-…} where the folder can't be used
+     */
+    public static OfficeStore open(Path folder, OfficeOptions options) {
+        return open(folder, options, false);
+    }
+
+    /** As {@link #open(Path, OfficeOptions)}, with the tables made anew from the journal and the packs. */
+    public static OfficeStore rebuild(Path folder, OfficeOptions options) {
+        return open(folder, options, true);
+    }
+
+    private static OfficeStore open(Path folder, OfficeOptions options, boolean afresh) {
+        Path home = folder.toAbsolutePath().normalize();
+        Desk desk = new Desk("bedmark-office");
+        try {
+            return desk.call(() -> openLocked(home, options, desk, afresh));
+        } catch (RuntimeException e) {
+            desk.close();
+            throw refused(e);
+        }
+    }
+
+    private static OfficeStore openLocked(Path folder, OfficeOptions options, Desk desk, boolean afresh) {
+        FileLayer files = options.files();
+        try {
+            if (files.exists(folder.resolve(DeviceFile.NAME)) && !files.exists(folder.resolve(OFFICE))) {
+                throw new Refused(Defect.in(folder.toString(), "store-of-tablet"));
+            }
+            files.createFolder(folder);
+            Closeable lock = files.lock(folder.resolve(LOCK))
+                    .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
+            try {
+                return new OfficeStore(folder, options, desk, lock, afresh);
+            } catch (IOException | RuntimeException e) {
+                lock.close();
+                throw e;
+            }
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("store", e, files, folder), e);
+        }
+    }
+
+    /** A database that fails is told in words too. */
+    private static RuntimeException refused(RuntimeException failure) {
+        return failure instanceof OfficeBroken
+                ? new Refused(Defect.in("", "office-database-failed", String.valueOf(failure.getMessage())), failure)
+                : failure;
+    }
+
+    /** What was done so far; called on the store's thread. */
+    private Minutes minutes(OfficeTables tables) {
+        minutes.readOn(tables);
+        return minutes;
+    }
+
+    private Register version(String digest) {
+        return new Register(JsonReader.read(books.tables().register(digest).orElseThrow()).root());
+    }
+
+    private <T> T ask(Function<OfficeTables, T> question) {
+        try {
+            return desk.call(() -> books.ask(() -> question.apply(books.tables())));
+        } catch (OfficeBroken e) {
+            throw refused(e);
+        }
+    }
+
+    /**
+     * Takes packs in, one after the other; each whole or not at all. A person may stop it between two of them.
+     *
+     * @param person   who receives
+     * @param progress told of the packs, and asked whether to stop
+     * @return what came of each, in their order; fewer than there are files where it was stopped
+     */
+    public List<Received> receive(List<Path> files, String person, Progress progress) {
+        List<Received> received = new ArrayList<>();
+        for (Path file : files) {
+            if (progress.cancelled()) {
+                return received;
+            }
+            progress.at(received.size(), files.size());
+            received.add(receive(file, person));
+        }
+        progress.at(files.size(), files.size());
+        return received;
+    }
+
+    /** Takes one pack in, whole or not at all. Receiving it again changes nothing. */
+    public Received receive(Path file, String person) {
+        Optional<String> fingerprint = Optional.empty();
+        Optional<Path> part = Optional.empty();
+        try {
+            PackShelf.Laid laid = shelf.lay(file);
+            part = Optional.of(laid.part());
+            ReadPack pack = new PackReader(options.limits(), BundleReader::read).open(laid.part(), Progress.NONE);
+            fingerprint = Optional.of(pack.fingerprint().text());
+            return take(file, laid, pack, person);
+        } catch (Refused e) {
+            part.ifPresent(shelf::drop);
+            Defect why = part.isPresent() && e.defect().where().equals(part.get().toString())
+                    ? new Defect(e.defect().code(), file.toString(), e.defect().details()) : e.defect();
+            return new Received.Turned(file, why, fingerprint);
+        }
+    }
+
+    private Received take(Path file, PackShelf.Laid laid, ReadPack pack, String person) {
+        String fingerprint = pack.fingerprint().text();
+        Branch document = pack.bundle().document();
+        Branch sender = document.branch("device").orElse(Branch.EMPTY);
+        String name = sender.text("name").orElse("");
+        String shown = name.isBlank() ? fingerprint : name;
+        if (!ask(tables -> minutes(tables).trusts(fingerprint))) {
+            throw new Refused(Defect.in(shown, "device-untrusted", fingerprint));
+        }
+        Intake intake = Intake.of(pack.bundle(), laid.sha256());
+        OfficeDeed deed = new OfficeDeed.PackReceived(laid.sha256(), file.getFileName().toString(), laid.bytes(),
+                fingerprint, document.uuid("id"), document.time("createdAt"), sender.uuid("id"), name);
+        Set<String> before = ask(tables -> Set.copyOf(tables.copiesOf(digests(intake)).keySet()));
+        Optional<Entry> entry = keep(tables -> tables.hasPack(laid.sha256()), () -> shelf.keep(laid),
+                new Books.Deed(person, deed, Optional.of(intake)));
+        if (entry.isEmpty()) {
+            shelf.drop(laid.part());
+            return new Received.AlreadyHere(file, laid.sha256(), shown, fingerprint, receipt(document, intake,
+                    received(laid.sha256())));
+        }
+        int known = (int) digests(intake).stream().filter(before::contains).count();
+        return new Received.Taken(file, laid.sha256(), shown, fingerprint, digests(intake).size() - known, known,
+                clashes(intake), ahead(document, entry.get().at()), receipt(document, intake, entry.get()));
+    }
+
+    /** The entry by which a pack was taken in. */
+    private Entry received(String sha256) {
+        return packs().stream().filter(entry -> entry.act() instanceof Act.OfficeActed acted
+                && acted.deed() instanceof OfficeDeed.PackReceived pack && pack.sha256().equals(sha256))
+                .findFirst().orElseThrow();
+    }
+
+    /** The same receipt however often the same pack comes. */
+    private Optional<Receipt> receipt(Branch bundle, Intake intake, Entry entry) {
+        String sha256 = intake.copies().isEmpty() ? "" : intake.copies().get(0).pack();
+        return bundle.uuid("id").filter(id -> !sha256.isEmpty()).map(id -> Receipt.of(
+                UUID.nameUUIDFromBytes((device.id() + sha256).getBytes(StandardCharsets.US_ASCII)), entry.at(),
+                new Receipt.Office(device.id(), device.name()), id, sha256, intake.copies().stream().map(row ->
+                        new Receipt.Item(row.copy().id(), row.copy().revision(), row.copy().digest())).toList()));
+    }
+
+    /**
+     * Signs and writes a receipt under its usual name.
+     *
+     * @param into a folder that exists
+     * @throws Refused {@code receipt-…}, {@code device-key-…}
+     */
+    public Path write(Receipt receipt, Path into) {
+        return ReceiptWriter.write(receipt, key(), into.resolve(ReceiptWriter.fileName(receipt)));
+    }
+
+    /** The key by which this office signs receipts and round files, made on first use. */
+    public DeviceKey key() {
+        return DeviceKey.of(folder);
+    }
+
+    private static Set<String> digests(Intake intake) {
+        Set<String> digests = new HashSet<>();
+        intake.copies().forEach(row -> digests.add(row.copy().digest()));
+        return digests;
+    }
+
+    private List<Clash> clashes(Intake intake) {
+        Set<ZoneId> zones = new HashSet<>();
+        intake.copies().forEach(row -> zones.add(row.copy().zone()));
+        return ask(tables -> Merge.zones(tables.copies(zones), minutes(tables).setAside()).values().stream()
+                .flatMap(zone -> zone.clashes().stream()).toList());
+    }
+
+    private static long ahead(Branch bundle, OffsetDateTime now) {
+        return bundle.time("createdAt").map(at -> Math.max(0, Duration.between(now, at).toSeconds())).orElse(0L);
+    }
+
+    /**
+     * Does something that the office decided.
+     *
+     * @return the entry with its number and time
+     */
+    public Entry act(String person, OfficeDeed deed) {
+        if (deed instanceof OfficeDeed.PackReceived) {
+            throw new IllegalArgumentException("a pack is received");
+        }
+        return keep(tables -> false, () -> { }, new Books.Deed(person, deed, Optional.empty())).orElseThrow();
+    }
+
+    private Optional<Entry> keep(Function<OfficeTables, Boolean> needless, Runnable first, Books.Deed deed) {
+        try {
+            return desk.call(() -> {
+                try {
+                    return books.keep(() -> {
+                        if (needless.apply(books.tables())) {
+                            return true;
+                        }
+                        first.run();
+                        return false;
+                    }, deed);
+                } catch (RuntimeException e) {
+                    // It may have read a deed that was taken back.
+                    minutes = new Minutes();
+                    throw e;
+                }
+            });
+        } catch (OfficeBroken e) {
+            throw refused(e);
+        }
+    }
+
+    /** Trusts a device from now on; nothing happens where it is trusted already. */
+    public void trust(String fingerprint, String name, String person) {
+        if (!ask(tables -> minutes(tables).trusts(fingerprint))) {
+            act(person, new OfficeDeed.DeviceTrusted(fingerprint, name));
+        }
+    }
+
+    public boolean trusts(String fingerprint) {
+        return ask(tables -> minutes(tables).trusts(fingerprint));
+    }
+
+    /** Every zone of every plant, worst first. */
+    public List<RankedZone> rank() {
+        return rank(RankQuery.ALL, Progress.NONE);
+    }
+
+    /**
+     * The zones that a query asks for, worst first.
+     *
+     * @param progress told while zones are judged that were not judged since they changed
+     */
+    public List<RankedZone> rank(RankQuery query, Progress progress) {
+        judgeWaiting(progress);
+        ZonedDateTime now = ZonedDateTime.now(options.clock());
+        return ask(tables -> {
+            Minutes known = minutes(tables);
+            return new Ranking(now, query, known::answers).rank(tables.zones());
+        });
+    }
+
+    /** A zone as it stands in the list. */
+    public Optional<RankedZone> ranked(ZoneId zone) {
+        judgeWaiting(Progress.NONE);
+        ZonedDateTime now = ZonedDateTime.now(options.clock());
+        return ask(tables -> {
+            Minutes known = minutes(tables);
+            return tables.zone(zone).map(new Ranking(now, RankQuery.ALL, known::answers)::ranked);
+        });
+    }
+
+    private void judgeWaiting(Progress progress) {
+        long total = ask(OfficeTables::countWaiting);
+        long done = 0;
+        while (done < total && !progress.cancelled()) {
+            progress.at(done, total);
+            int judged = ask(tables -> {
+                List<ZoneId> zones = tables.waiting(JUDGED_AT_ONCE);
+                Map<ZoneId, Optional<Verdict>> verdicts = new LinkedHashMap<>();
+                latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
+                        sides.stream().min(Judge.WORST_FIRST).map(worst -> Judge.verdict(worst.assessment()))));
+                tables.judge(verdicts);
+                return zones.size();
+            });
+            if (judged == 0) {
+                return;
+            }
+            done += judged;
+        }
+    }
+
+    /** Each zone's latest result, and what clashes with it, by the registers that they were made with. */
+    private Map<ZoneId, List<JudgedZone>> latest(OfficeTables tables, Collection<ZoneId> zones) {
+        Map<ZoneId, MergedZone> merged = new LinkedHashMap<>(Merge.zones(tables.copies(zones),
+                minutes(tables).setAside()));
+        List<Copy> sides = merged.values().stream().flatMap(zone -> zone.latest().stream()).toList();
+        Map<ZoneId, List<JudgedZone>> judged = new LinkedHashMap<>();
+        zones.forEach(zone -> judged.put(zone, new ArrayList<>()));
+        judged(tables, sides, copy -> copy.origin().register()).forEach(one -> judged.get(one.zone()).add(one));
+        return judged;
+    }
+
+    private List<JudgedZone> judged(OfficeTables tables, List<Copy> copies, Function<Copy, String> register) {
+        Map<String, List<Copy>> drives = new HashMap<>();
+        Merge.zones(tables.companions(copies), minutes(tables).setAside()).values().forEach(zone -> zone.results()
+                .forEach(copy -> drives.computeIfAbsent(drive(copy), key -> new ArrayList<>()).add(copy)));
+        Set<String> wanted = new HashSet<>();
+        copies.forEach(copy -> {
+            wanted.add(copy.digest());
+            drives.getOrDefault(drive(copy), List.of()).forEach(other -> wanted.add(other.digest()));
+        });
+        Map<String, Survey> documents = documents(tables, wanted);
+        return copies.stream().flatMap(copy -> judge.judge(copy, register.apply(copy),
+                drives.getOrDefault(drive(copy), List.of()), documents).stream()).toList();
+    }
+
+    private static String drive(Copy copy) {
+        return copy.zone().plant() + '\n' + copy.round() + '\n' + copy.origin().conveyor();
+    }
+
+    private static Map<String, Survey> documents(OfficeTables tables, Collection<String> digests) {
+        Map<String, Survey> documents = new HashMap<>();
+        tables.contents(digests).forEach((digest, text) ->
+                documents.put(digest, new Survey(JsonReader.read(text).root())));
+        return documents;
+    }
+
+    /**
+     * A zone's latest result by the register that it was made with; the worst, where contents clash.
+     *
+     * @return nothing where it was never inspected, or can't be judged
+     */
+    public Optional<JudgedZone> judged(ZoneId zone) {
+        return ask(tables -> latest(tables, List.of(zone)).get(zone).stream().min(Judge.WORST_FIRST));
+    }
+
+    /** The same result by the register that holds today. */
+    public Optional<JudgedZone> judgedToday(ZoneId zone) {
+        return ask(tables -> tables.plant(zone.plant()).flatMap(today -> judged(tables,
+                Merge.zone(zone, tables.copies(List.of(zone)), minutes(tables).setAside()).latest(),
+                copy -> today.register()).stream().min(Judge.WORST_FIRST)));
+    }
+
+    /** All results of a zone that count, in time order, each by the register that it was made with. */
+    public List<JudgedZone> history(ZoneId zone) {
+        return ask(tables -> judged(tables, Merge.zone(zone, tables.copies(List.of(zone)),
+                minutes(tables).setAside()).results(), copy -> copy.origin().register()));
+    }
+
+    /** The digests of everything that came, by zone, survey and revision. */
+    List<String> contents() {
+        return ask(tables -> tables.copies().stream().map(Copy::digest).toList());
+    }
+
+    /** Contents with what the flat table tells of them, in the order of the digests. */
+    List<FlatRow> rows(List<String> digests) {
+        return ask(tables -> {
+            Map<String, Copy> copies = tables.copiesOf(digests);
+            Map<String, Survey> documents = documents(tables, digests);
+            List<Copy> ordered = digests.stream().map(copies::get).toList();
+            Set<String> counting = new HashSet<>();
+            Merge.zones(tables.copies(ordered.stream().map(Copy::zone).distinct().toList()),
+                    minutes(tables).setAside()).values().forEach(zone -> zone.visits().forEach(copy ->
+                    counting.add(copy.digest())));
+            Map<String, JudgedZone> judged = new HashMap<>();
+            judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
+                    .forEach(one -> judged.put(one.copy().digest(), one));
+            return ordered.stream().map(copy -> new FlatRow(copy, counting.contains(copy.digest()),
+                    documents.get(copy.digest()), judge.register(copy.origin().register()),
+                    Optional.ofNullable(judged.get(copy.digest())))).toList();
+        });
+    }
+
+    /** Every version of every register that a survey was made with, by digest. */
+    SortedMap<String, byte[]> registerVersions() {
+        return ask(tables -> {
+            SortedMap<String, byte[]> versions = new TreeMap<>();
+            tables.registers().forEach(digest -> versions.put(digest, tables.register(digest).orElseThrow()));
+            return versions;
+        });
+    }
+
+    /** What counts of a zone's surveys. */
+    public MergedZone merged(ZoneId zone) {
+        return ask(tables -> Effects.merged(tables, zone, minutes(tables)));
+    }
+
+    /** A zone's surveys by their digests, with all sides of every clash. */
+    public Map<String, Survey> surveys(Collection<String> digests) {
+        return ask(tables -> documents(tables, digests));
+    }
+
+    /** The zone with that id, or with that tag where there is one alone. */
+    public Optional<ZoneId> zone(String named) {
+        List<ZoneRow> rows = ask(OfficeTables::zones);
+        List<ZoneId> exact = rows.stream().filter(row -> row.names().zone().key().equals(named)
+                || row.names().zone().transfer().equals(named)).map(row -> row.names().zone()).toList();
+        List<ZoneId> found = exact.isEmpty() ? rows.stream().filter(row -> row.names().tag().equals(named))
+                .map(row -> row.names().zone()).toList() : exact;
+        return found.size() == 1 ? Optional.of(found.get(0)) : Optional.empty();
+    }
+
+    /** The register that holds today, by plant. */
+    public Map<String, Register> registers() {
+        return ask(tables -> {
+            Map<String, Register> registers = new LinkedHashMap<>();
+            tables.plants().forEach(row -> registers.put(row.id(), Effects.register(row)));
+            return registers;
+        });
+    }
+
+    /** {@code plant}, {@code forms} and {@code rounds} that hold today. */
+    public Optional<Branch> head(String plant) {
+        return ask(tables -> tables.plant(plant).map(row -> JsonReader.read(row.content()).root()));
+    }
+
+    /** The packs that were taken in, in their order; each entry's deed is a {@link OfficeDeed.PackReceived}. */
+    public List<Entry> packs() {
+        return ask(tables -> minutes(tables).packs());
+    }
+
+    public List<OfficeDeed.ActionSet> actions() {
+        return ask(tables -> minutes(tables).actions());
+    }
+
+    public Device device() {
+        return device;
+    }
+
+    /** What was not as it was written when the store was opened. */
+    public List<Defect> found() {
+        return desk.call(() -> books instanceof FolderBooks folder ? folder.found() : List.of());
+    }
+
+    @Override
+    public void close() {
+        if (closed.getAndSet(true)) {
+            return;
+        }
+        desk.call(() -> {
+            books.close();
+            lock.close();
+            return true;
+        });
+        desk.close();
+    }
+}

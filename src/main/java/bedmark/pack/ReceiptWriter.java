@@ -1,0 +1,82 @@
+package bedmark.pack;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Refused;
+import bedmark.journal.Fault;
+import bedmark.journal.FileLayer;
+import bedmark.json.JsonWriter;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.ReadOnlyFileSystemException;
+import java.util.Base64;
+
+/**
+ * Writes a receipt as one JSON file: the receipt, then {@code key} (the office's public key as PEM) and
+ * {@code signature} (Ed25519 over the exact bytes of the same JSON without {@code signature}, without spaces and line
+ * ends, as base64). It is proved outside with {@code jq -cj 'del(.signature)'} and {@code openssl pkeyutl -verify
+ * -rawin}. The same receipt and key always give the same file.
+ */
+public final class ReceiptWriter {
+    static final String KEY = "key";
+    static final String SIGNATURE = "signature";
+    private static final String ENDING = ".receipt.json";
+
+    private final FileLayer disk;
+
+    ReceiptWriter(FileLayer disk) {
+        this.disk = disk;
+    }
+
+    /** The usual name of a receipt, beside a pack or anywhere else. */
+    public static String fileName(Receipt receipt) {
+        return "bedmark-" + receipt.pack().toString().substring(0, 8) + "-"
+                + receipt.id().toString().substring(0, 8) + ENDING;
+    }
+
+    /** The file's exact bytes. */
+    public static byte[] text(Receipt receipt, DeviceKey office) {
+        Branch signed = receipt.document().without(SIGNATURE)
+                .with(KEY, new String(office.publicText(), StandardCharsets.US_ASCII));
+        return JsonWriter.indented(signed.with(SIGNATURE,
+                Base64.getEncoder().encodeToString(office.sign(JsonWriter.compact(signed)))));
+    }
+
+    /**
+     * Writes a receipt whole or not at all.
+     *
+     * @param out the file, in a folder that exists; an older one of that name stays until the new one is whole
+     * @throws Refused {@code receipt-disk-full}, {@code receipt-read-only}, {@code receipt-vanished},
+     *                 {@code receipt-not-saved}
+     */
+    public static Path write(Receipt receipt, DeviceKey office, Path out) {
+        return new ReceiptWriter(FileLayer.disk()).writeReceipt(receipt, office, out);
+    }
+
+    Path writeReceipt(Receipt receipt, DeviceKey office, Path out) {
+        Path target = out.toAbsolutePath();
+        byte[] text = text(receipt, office);
+        if (!Files.isDirectory(target.getParent())) {
+            throw new Refused(Defect.in(target.getParent().toString(), "receipt-vanished"));
+        }
+        try {
+            new SafeFile(disk, target, false).write(file -> file.write(text));
+            return target;
+        } catch (IOException | ReadOnlyFileSystemException e) {
+            throw new Refused(defect(e, target.getParent()), e);
+        }
+    }
+
+    private Defect defect(Exception failure, Path folder) {
+        Fault fault = failure instanceof IOException known ? Fault.of(known, disk, folder) : Fault.READ_ONLY;
+        String where = folder.toString();
+        return switch (fault) {
+            case VANISHED -> Defect.in(where, "receipt-vanished");
+            case DISK_FULL -> Defect.in(where, "receipt-disk-full");
+            case READ_ONLY -> Defect.in(where, "receipt-read-only");
+            case FORCE_FAILED, FAILED -> Defect.in(where, "receipt-not-saved", WriteFailure.reason(failure));
+        };
+    }
+}

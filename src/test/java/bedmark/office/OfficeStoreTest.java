@@ -1,0 +1,190 @@
+package bedmark.office;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.document.Branch;
+import bedmark.engine.verdict.Level;
+import bedmark.journal.Digest;
+import bedmark.survey.OfficeDeed;
+import java.util.Optional;
+import bedmark.survey.Assessor;
+import bedmark.survey.Bundle;
+import bedmark.survey.InspectionStatus;
+import bedmark.survey.merge.Clash;
+import bedmark.survey.merge.ZoneId;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+import java.util.Map;
+import java.util.Random;
+import java.util.TreeMap;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** Packs of the demo plant received in an office. */
+class OfficeStoreTest {
+    @TempDir
+    private Path folder;
+
+    private Path tablet() {
+        return folder.resolve("tablet");
+    }
+
+    private Path packOf(String sample) {
+        return Offices.pack(Offices.sample(sample), tablet(), folder.resolve("packs-out").resolve(sample + ".zip"));
+    }
+
+    @Test
+    void everySurveyOfAPackIsTakenInAndJudgedAsTheEngineJudgesIt() {
+        Path pack = packOf("round-2026-03");
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
+            Received.Taken taken = assertInstanceOf(Received.Taken.class, store.receive(pack, "Ida Marsh"));
+            Bundle bundle = Offices.sample("round-2026-03");
+            assertEquals(bundle.surveys().size(), taken.fresh());
+            assertEquals(0, taken.known());
+            assertEquals(List.of(), taken.clashes());
+            Map<String, Level> expected = new TreeMap<>();
+            new Assessor(bundle.register()).assess(bundle.surveys()).stream()
+                    .filter(one -> one.survey().inspectionStatus() == InspectionStatus.INSPECTED)
+                    .forEach(one -> expected.put(one.survey().transfer(), Judge.level(one.assessment())));
+            Map<String, Level> ranked = store.rank().stream().filter(zone -> zone.level().isPresent()).collect(
+                    Collectors.toMap(zone -> zone.zone().transfer(), zone -> zone.level().get(), (one, two) -> one,
+                            TreeMap::new));
+            assertEquals(expected, ranked);
+            assertEquals(bundle.register().transfers().size(), store.rank().size());
+        }
+    }
+
+    @Test
+    void theListIsWorstFirstAndWhatNobodySawNeverLooksHealthy() {
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
+            store.receive(packOf("round-2026-03"), "Ida Marsh");
+            List<RankedZone> ranked = store.rank();
+            for (int i = 1; i < ranked.size(); i++) {
+                RankedZone before = ranked.get(i - 1);
+                RankedZone after = ranked.get(i);
+                assertTrue(before.place().compareTo(after.place()) <= 0);
+                assertTrue(before.place() != after.place()
+                        || before.driveShare().orElse(-1) >= after.driveShare().orElse(-1));
+            }
+            RankedZone barred = store.ranked(new ZoneId("ostermere", "TP-17")).orElseThrow();
+            assertEquals(Place.NOT_INSPECTED, barred.place());
+            assertEquals(InspectionStatus.NOT_ACCESSIBLE, barred.visitStatus().orElseThrow());
+            assertTrue(ranked.stream().filter(zone -> zone.place() == Place.WITHIN).allMatch(zone ->
+                    zone.visitStatus().equals(Optional.of(InspectionStatus.INSPECTED)) && !zone.stale()));
+        }
+    }
+
+    @Test
+    void receivingAPackAgainChangesNothing() {
+        Path pack = packOf("round-2026-03");
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
+            store.receive(pack, "Ida Marsh");
+            String told = Offices.told(store);
+            assertInstanceOf(Received.AlreadyHere.class, store.receive(pack, "Ida Marsh"));
+            assertEquals(told, Offices.told(store));
+            assertEquals(1, store.packs().size());
+        }
+    }
+
+    @Test
+    void aPackOfAnUnknownDeviceIsRefusedAndTheStoreIsByteIdentical() throws IOException {
+        Path pack = packOf("round-2026-03");
+        Path office = folder.resolve("office");
+        OfficeStore.open(office, OfficeOptions.of(Offices.NOW)).close();
+        Map<String, String> before = files(office);
+        try (OfficeStore store = OfficeStore.open(office, OfficeOptions.of(Offices.NOW))) {
+            Received.Turned turned = assertInstanceOf(Received.Turned.class, store.receive(pack, "Ida Marsh"));
+            assertEquals("device-untrusted", turned.why().code());
+            assertEquals(Offices.fingerprint(tablet()), turned.fingerprint().orElseThrow());
+            Path broken = Files.write(folder.resolve("broken.zip"), new byte[] {1, 2, 3});
+            assertInstanceOf(Received.Turned.class, store.receive(broken, "Ida Marsh"));
+            assertInstanceOf(Received.Turned.class, store.receive(folder.resolve("absent.zip"), "Ida Marsh"));
+        }
+        assertEquals(before, files(office));
+    }
+
+    /** The truth: every file but those of the index, which is a database that may write as it likes. */
+    private static Map<String, String> files(Path office) throws IOException {
+        try (Stream<Path> files = Files.walk(office)) {
+            Map<String, String> digests = new TreeMap<>();
+            for (Path file : files.filter(Files::isRegularFile).toList()) {
+                String name = office.relativize(file).toString();
+                if (!name.startsWith("index")) {
+                    digests.put(name, Digest.of(Files.readAllBytes(file)).hex());
+                }
+            }
+            return digests;
+        }
+    }
+
+    @Test
+    void theTablesAreMadeAnewFromJournalAndPacks() throws IOException {
+        Path office = folder.resolve("office");
+        String told;
+        try (OfficeStore store = Offices.trusting(office, tablet())) {
+            store.receive(packOf("round-2025-09"), "Ida Marsh");
+            store.receive(packOf("round-2026-03"), "Ida Marsh");
+            told = Offices.told(store);
+        }
+        try (OfficeStore store = OfficeStore.rebuild(office, OfficeOptions.of(Offices.NOW))) {
+            assertEquals(told, Offices.told(store));
+        }
+        try (Stream<Path> index = Files.list(office.resolve("index"))) {
+            for (Path file : index.toList()) {
+                Files.write(file, new byte[] {7, 7, 7});
+            }
+        }
+        try (OfficeStore store = OfficeStore.open(office, OfficeOptions.of(Offices.NOW))) {
+            assertEquals(told, Offices.told(store));
+        }
+    }
+
+    @Test
+    void sameRevisionWithOtherContentStandsSideBySideAndAPersonDecides() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        List<Branch> surveys = bundle.document().branches("surveys");
+        Branch original = surveys.get(0);
+        Branch altered = original.with("notes", "the same visit, told otherwise");
+        Path one = Offices.pack(bundle, tablet(), folder.resolve("one.zip"));
+        Path two = Offices.pack(Offices.with(bundle, "two", "2026-03-18T14:00:00+01:00", List.of(altered)),
+                folder.resolve("other"), folder.resolve("two.zip"));
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet(), folder.resolve("other"))) {
+            store.receive(one, "Ida Marsh");
+            Received.Taken taken = assertInstanceOf(Received.Taken.class, store.receive(two, "Ida Marsh"));
+            assertEquals(1, taken.clashes().size());
+            Clash clash = taken.clashes().get(0);
+            assertEquals(Clash.Kind.SAME_REVISION, clash.kind());
+            assertEquals(2, clash.sides().size());
+            ZoneId zone = clash.sides().get(0).zone();
+            assertEquals(1, store.ranked(zone).orElseThrow().clashes());
+            store.act("Ida Marsh", new OfficeDeed.ClashSettled(zone,
+                    List.of(clash.sides().get(1).digest()), "the first one was signed off"));
+            assertEquals(0, store.ranked(zone).orElseThrow().clashes());
+            assertEquals(clash.sides().get(0).digest(), store.ranked(zone).orElseThrow().survey().orElseThrow());
+        }
+    }
+
+    @Test
+    void theOrderInWhichPacksComeDoesNotMatter() {
+        List<Path> packs = new ArrayList<>(List.of(packOf("round-2025-09"), packOf("round-2026-03"),
+                packOf("round-under-way")));
+        Random random = new Random(6);
+        List<String> told = new ArrayList<>();
+        for (int i = 0; i < 3; i++) {
+            Collections.shuffle(packs, random);
+            try (OfficeStore store = Offices.trusting(folder.resolve("office" + i), tablet())) {
+                packs.forEach(pack -> assertInstanceOf(Received.Taken.class, store.receive(pack, "Ida Marsh")));
+                told.add(Offices.told(store));
+            }
+        }
+        assertEquals(1, told.stream().distinct().count());
+    }
+}

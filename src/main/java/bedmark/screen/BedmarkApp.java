@@ -12,7 +12,6 @@ import bedmark.survey.LevelWord;
 import bedmark.vault.Passphrase;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
-import java.io.File;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Map;
@@ -21,7 +20,6 @@ import java.util.function.Function;
 import javafx.application.Application;
 import javafx.application.Platform;
 import javafx.scene.Scene;
-import javafx.stage.DirectoryChooser;
 import javafx.stage.Stage;
 
 /** The window of the tablet app. */
@@ -106,7 +104,7 @@ public final class BedmarkApp extends Application {
 
     private void work(Stage stage, Launch given, Store store) {
         Workplace here = new Workplace(store, given.clock(), Platform::runLater,
-                (title, begin) -> chooseFolder(stage, title, begin), given.samples());
+                new StageChoice(stage), given.samples());
         Shell opened = new Shell(here, WIDTH, HEIGHT);
         workplace = Optional.of(here);
         shell = Optional.of(opened);
@@ -123,13 +121,6 @@ public final class BedmarkApp extends Application {
         if (given.load()) {
             opened.loadDemo();
         }
-    }
-
-    private static Optional<Path> chooseFolder(Stage stage, String title, Optional<Path> begin) {
-        DirectoryChooser chooser = new DirectoryChooser();
-        chooser.setTitle(title);
-        begin.map(Path::toFile).filter(File::isDirectory).ifPresent(chooser::setInitialDirectory);
-        return Optional.ofNullable(chooser.showDialog(stage)).map(File::toPath);
     }
 
     @Override

@@ -136,10 +136,10 @@ public final class ZoneSketcher {
     private Captions captions(LoadingZone zone, OptionalDouble length, OptionalDouble height, OptionalDouble spacing,
                               OptionalDouble speed, Optional<AllowedDepth> allowed,
                               List<ZoneSketch.Station> stations) {
-        Unit metres = wording.units().unit(Dimension.LENGTH);
+        Unit metres = wording.unit(Dimension.LENGTH);
         return new Captions(wording.text("screen.picture.feed"),
                 speed.isPresent() ? wording.text("screen.picture.belt",
-                        wording.computed(speed.getAsDouble(), wording.units().unit(Dimension.SPEED)))
+                        wording.computed(speed.getAsDouble(), wording.unit(Dimension.SPEED)))
                         : wording.text("screen.picture.belt-unknown"),
                 height.isPresent() ? small(height.getAsDouble()) : "",
                 wording.text(height.isPresent() ? "screen.picture.board-top" : "screen.picture.board-unknown"),
@@ -168,7 +168,7 @@ public final class ZoneSketcher {
 
     /** A depth or width as a bare number of the small unit; the picture's captions share one unit. */
     private String small(double metres) {
-        Unit unit = wording.units().smallLength();
+        Unit unit = wording.smallLength();
         return unit == Unit.MILLIMETRE ? wording.format().computed(unit.fromSi(metres), 0)
                 : wording.format().computed(metres, unit);
     }

@@ -40,6 +40,7 @@ public final class Bedmark {
         }
         TOOLKIT.setLevel(Level.SEVERE);
         Clock clock = Clock.systemDefaultZone();
+        BedmarkApp.prepare();
         StoreOptions options = BedmarkApp.options(clock);
         if (new StoreFolder(folder, options).sealed()) {
             return BedmarkApp.unlock(folder, passphrase -> Store.open(folder,

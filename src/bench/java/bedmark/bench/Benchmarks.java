@@ -15,6 +15,7 @@ public final class Benchmarks {
                     new ScreenSuite(),
                     new SaveSuite(),
                     new StartSuite(),
+                    new ExportSuite(),
                     new WindowSuite());
 
     private Benchmarks() {

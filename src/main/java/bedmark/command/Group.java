@@ -33,8 +33,15 @@ abstract class Group implements Callable<Integer> {
     static final class ReferenceGroup extends Group {
     }
 
+    /** The office. */
+    @Command(name = "office", mixinStandardHelpOptions = true,
+            description = "The maintenance office: receives packs, ranks the zones, reports, sends rounds out.")
+    static final class OfficeGroup extends Group {
+    }
+
     /** Stores. */
-    @Command(name = "store", mixinStandardHelpOptions = true, description = "Proves and rebuilds a store.")
+    @Command(name = "store", mixinStandardHelpOptions = true, 
+            description = "Proves, rebuilds, backs up, restores and encrypts a store; reads the office's receipts.")
     static final class StoreGroup extends Group {
     }
 }

@@ -6,11 +6,12 @@ import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.journal.Digest;
 import bedmark.journal.FileLayer;
+import bedmark.vault.DataKey;
+import bedmark.vault.SealedInput;
 import java.io.FileInputStream;
 import java.io.FileNotFoundException;
 import java.io.IOException;
 import java.io.InputStream;
-import java.nio.ByteBuffer;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.util.Arrays;
@@ -18,11 +19,16 @@ import java.util.Optional;
 import java.util.UUID;
 import java.util.regex.Pattern;
 
-/** The folder {@code photos/}: each file untouched, under its own digest, and only ever there as a whole. */
+/**
+ * The folder {@code photos/}: each file untouched, under its own digest, and only ever there as a whole. Where the store
+ * has a key, each is sealed with it and bears a further ending; the digest is that of the photo itself.
+ */
 final class PhotoShelf {
     static final String FOLDER = "photos";
     /** What is not yet a photo lies apart, so that opening need not look through the photos of many years. */
     static final String INCOMING = "incoming";
+    /** What the names of sealed files end with. */
+    static final String SEALED = ".sealed";
     private static final Pattern FILE = Pattern.compile("photos/[0-9a-f]{64}\\.(jpg|png)");
     private static final String PART = ".part";
     private static final int CHUNK = 256 << 10;
@@ -33,12 +39,14 @@ final class PhotoShelf {
     private final Path folder;
     private final Path incoming;
     private final FileLayer files;
+    private final Optional<DataKey> key;
 
-    PhotoShelf(Path store, FileLayer files) {
+    PhotoShelf(Path store, FileLayer files, Optional<DataKey> key) {
         this.store = store;
         this.folder = store.resolve(FOLDER);
         this.incoming = store.resolve(INCOMING);
         this.files = files;
+        this.key = key;
     }
 
     Path folder() {
@@ -56,7 +64,28 @@ final class PhotoShelf {
 
     /** Where the file of a photo lies; nothing where its document names none of this shelf. */
     Optional<Path> file(Branch photo) {
-        return photo.text("file").filter(name -> FILE.matcher(name).matches()).map(store::resolve);
+        return photo.text("file").filter(name -> FILE.matcher(name).matches()).map(this::onDisk);
+    }
+
+    /** Whether a photo's document names a file of a shelf at all; a survey from elsewhere may name others. */
+    static boolean isShelved(Branch photo) {
+        return photo.text("file").filter(name -> FILE.matcher(name).matches()).isPresent();
+    }
+
+    private Path onDisk(String name) {
+        return store.resolve(key.isPresent() ? name + SEALED : name);
+    }
+
+    /** The photo in a file of this shelf, whether it is sealed or not. */
+    InputStream read(Path file) throws IOException {
+        return Sealed.read(files, file, key);
+    }
+
+    /** The size of the photo in a file of this shelf (bytes); negative where the file is damaged. */
+    long size(Path file) throws IOException {
+        try (FileLayer.Input input = files.read(file)) {
+            return key.isPresent() ? SealedInput.plainLength(input.size()) : input.size();
+        }
     }
 
     /**
@@ -102,26 +131,27 @@ final class PhotoShelf {
     private Copied copy(InputStream source, byte[] chunk, int first, Path part) throws IOException {
         MessageDigest sha = Digest.sha256();
         long bytes = 0;
-        try (FileLayer.Output output = files.create(part)) {
+        try (Sealed.Writing writing = Sealed.write(files, part, key)) {
             for (int count = first; count > 0; count = read(source, chunk)) {
                 sha.update(chunk, 0, count);
-                output.write(ByteBuffer.wrap(chunk, 0, count));
+                writing.write(chunk, count);
                 bytes += count;
             }
-            output.force();
+            writing.finish();
         }
         return new Copied(Digest.ofBytes(sha.digest()), bytes);
     }
 
     private Branch place(Path part, String ending, Copied copied) throws IOException {
-        Path file = folder.resolve(copied.digest().hex() + ending);
-        if (files.exists(file) && digestOf(file).equals(copied.digest())) {
+        String name = FOLDER + "/" + copied.digest().hex() + ending;
+        Path file = onDisk(name);
+        if (files.exists(file) && digestOf(file).equals(Optional.of(copied.digest()))) {
             files.delete(part);
         } else {
             files.move(part, file);
         }
         files.forceFolder(folder);
-        return Branch.EMPTY.with("file", FOLDER + "/" + file.getFileName()).with("sha256", copied.digest().hex())
+        return Branch.EMPTY.with("file", name).with("sha256", copied.digest().hex())
                 .with("bytes", Node.number(copied.bytes()));
     }
 
@@ -133,18 +163,9 @@ final class PhotoShelf {
         }
     }
 
-    Digest digestOf(Path file) throws IOException {
-        MessageDigest sha = Digest.sha256();
-        try (FileLayer.Input input = files.read(file)) {
-            long at = 0;
-            for (int count = 1; count > 0;) {
-                ByteBuffer chunk = ByteBuffer.allocate(CHUNK);
-                count = input.read(at, chunk);
-                at += count;
-                sha.update(chunk.flip());
-            }
-        }
-        return Digest.ofBytes(sha.digest());
+    /** The digest of the photo in a file of this shelf; nothing where a sealed one is damaged. */
+    Optional<Digest> digestOf(Path file) throws IOException {
+        return Sealed.digest(files, file, key);
     }
 
     private static int read(InputStream source, byte[] chunk) throws SourceFailed {

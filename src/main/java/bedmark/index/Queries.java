@@ -109,13 +109,15 @@ final class Queries {
         return new Walk(steps.round(), started.person(), started.at(), finished.map(Entry::at));
     }
 
-    /** The proposals that stand, in the order in which they were first made. */
-    List<Branch> proposals() {
+    /** The proposals that stood as of an entry, in the order in which they were first made. */
+    List<Branch> proposals(long asOf) {
         Map<UUID, Branch> standing = new LinkedHashMap<>();
         List<Entry> made = index.landmarks("point-proposed", Integer.MAX_VALUE);
         for (int i = made.size() - 1; i >= 0; i--) {
-            Act.PointProposed act = (Act.PointProposed) made.get(i).act();
-            standing.put(act.id(), act.proposal());
+            if (made.get(i).sequence() <= asOf) {
+                Act.PointProposed act = (Act.PointProposed) made.get(i).act();
+                standing.put(act.id(), act.proposal());
+            }
         }
         return standing.values().stream().filter(proposal -> !proposal.members().isEmpty()).toList();
     }

@@ -67,6 +67,10 @@ public final class EntryCodec {
         } else if (act instanceof Act.OfficeActed office) {
             return OfficeDeedCodec.write(office.deed(), branch);
         }
+        if (act instanceof Act.BackupMade made) {
+            return branch.with("folder", made.folder()).with("upTo", Node.number(made.upTo()))
+                    .with("sha256", made.sha256());
+        }
         throw new IllegalStateException("an act without a form on disk: " + act.code());
     }
 
@@ -105,6 +109,8 @@ public final class EntryCodec {
             case "pack-exported" -> new Act.PackExported(ids(branch), text(branch, "pack"), text(branch, "sha256"),
                     text(branch, "folder"));
             case "receipt-noted" -> new Act.ReceiptNoted(ids(branch), branch(branch, "receipt"));
+            case "backup-made" -> new Act.BackupMade(text(branch, "folder"), number(branch, "upTo"),
+                    text(branch, "sha256"));
             default -> new Act.OfficeActed(OfficeDeedCodec.read(code, branch).orElseThrow(() ->
                     new Refused(Defect.at(Pointer.of("act"), "word-unknown", code))));
         };

@@ -73,8 +73,8 @@ final class Effects implements Books.Effect {
                 put(tables, intake.plant(), register);
             }
         }
-        Set<String> fresh = tables.add(intake.copies());
-        List<Copy> added = intake.copies().stream().map(CopyRow::copy).filter(copy -> fresh.contains(copy.digest()))
+        Set<String> touched = tables.add(intake.copies());
+        List<Copy> added = intake.copies().stream().map(CopyRow::copy).filter(copy -> touched.contains(copy.digest()))
                 .toList();
         if (!added.isEmpty()) {
             Set<ZoneId> zones = Set.copyOf(added.stream().map(Copy::zone).distinct().toList());

@@ -54,6 +54,11 @@ final class Judge {
         return new Known(assessor, held.get(digest));
     }
 
+    /** The version of a register that has a digest. */
+    Register register(String digest) {
+        return known(digest).register();
+    }
+
     /**
      * Judges one survey.
      *

@@ -15,8 +15,14 @@ import bedmark.journal.FileLayer;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.json.JsonReader;
+import bedmark.office.FlatColumn.FlatRow;
+import bedmark.office.trend.ZoneTrend;
+import bedmark.pack.DeviceKey;
 import bedmark.pack.PackReader;
 import bedmark.pack.ReadPack;
+import bedmark.pack.Receipt;
+import bedmark.pack.ReceiptWriter;
+import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Register;
@@ -28,6 +34,7 @@ import bedmark.survey.merge.MergedZone;
 import bedmark.survey.merge.ZoneId;
 import java.io.Closeable;
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.time.OffsetDateTime;
@@ -41,6 +48,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.SortedMap;
+import java.util.TreeMap;
+import java.util.UUID;
 import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.function.Function;
 
@@ -54,6 +64,7 @@ public final class OfficeStore implements AutoCloseable {
     private static final String OFFICE = "office.json";
     private static final int JUDGED_AT_ONCE = 500;
 
+    private final Path folder;
     private final OfficeOptions options;
     private final Desk desk;
     private final Closeable lock;
@@ -66,6 +77,7 @@ public final class OfficeStore implements AutoCloseable {
 
     private OfficeStore(Path folder, OfficeOptions options, Desk desk, Closeable lock, boolean afresh)
             throws IOException {
+        this.folder = folder;
         this.options = options;
         this.desk = desk;
         this.lock = lock;
@@ -205,11 +217,43 @@ public final class OfficeStore implements AutoCloseable {
                 new Books.Deed(person, deed, Optional.of(intake)));
         if (entry.isEmpty()) {
             shelf.drop(laid.part());
-            return new Received.AlreadyHere(file, laid.sha256(), shown, fingerprint);
+            return new Received.AlreadyHere(file, laid.sha256(), shown, fingerprint, receipt(document, intake,
+                    received(laid.sha256())));
         }
         int known = (int) digests(intake).stream().filter(before::contains).count();
         return new Received.Taken(file, laid.sha256(), shown, fingerprint, digests(intake).size() - known, known,
-                clashes(intake), ahead(document, entry.get().at()));
+                clashes(intake), ahead(document, entry.get().at()), receipt(document, intake, entry.get()));
+    }
+
+    /** The entry by which a pack was taken in. */
+    private Entry received(String sha256) {
+        return packs().stream().filter(entry -> entry.act() instanceof Act.OfficeActed acted
+                && acted.deed() instanceof OfficeDeed.PackReceived pack && pack.sha256().equals(sha256))
+                .findFirst().orElseThrow();
+    }
+
+    /** The same receipt however often the same pack comes. */
+    private Optional<Receipt> receipt(Branch bundle, Intake intake, Entry entry) {
+        String sha256 = intake.copies().isEmpty() ? "" : intake.copies().get(0).pack();
+        return bundle.uuid("id").filter(id -> !sha256.isEmpty()).map(id -> Receipt.of(
+                UUID.nameUUIDFromBytes((device.id() + sha256).getBytes(StandardCharsets.US_ASCII)), entry.at(),
+                new Receipt.Office(device.id(), device.name()), id, sha256, intake.copies().stream().map(row ->
+                        new Receipt.Item(row.copy().id(), row.copy().revision(), row.copy().digest())).toList()));
+    }
+
+    /**
+     * Signs and writes a receipt under its usual name.
+     *
+     * @param into a folder that exists
+     * @throws Refused {@code receipt-…}, {@code device-key-…}
+     */
+    public Path write(Receipt receipt, Path into) {
+        return ReceiptWriter.write(receipt, key(), into.resolve(ReceiptWriter.fileName(receipt)));
+    }
+
+    /** The key by which this office signs receipts and round files, made on first use. */
+    public DeviceKey key() {
+        return DeviceKey.of(folder);
     }
 
     private static Set<String> digests(Intake intake) {
@@ -381,6 +425,50 @@ public final class OfficeStore implements AutoCloseable {
                 minutes(tables).setAside()).results(), copy -> copy.origin().register()));
     }
 
+    /** A zone over time. */
+    public ZoneTrend trend(ZoneId zone) {
+        List<JudgedZone> counted = history(zone);
+        Set<String> digests = new HashSet<>();
+        counted.forEach(one -> digests.add(one.copy().digest()));
+        List<JudgedZone> replaced = ask(tables -> judged(tables, tables.copies(List.of(zone)).stream()
+                .filter(copy -> copy.result() && !digests.contains(copy.digest())).toList(),
+                copy -> copy.origin().register()));
+        return ZoneTrend.of(zone, counted, replaced);
+    }
+
+    /** The digests of everything that came, by zone, survey and revision. */
+    List<String> contents() {
+        return ask(tables -> tables.copies().stream().map(Copy::digest).toList());
+    }
+
+    /** Contents with what the flat table tells of them, in the order of the digests. */
+    List<FlatRow> rows(List<String> digests) {
+        return ask(tables -> {
+            Map<String, Copy> copies = tables.copiesOf(digests);
+            Map<String, Survey> documents = documents(tables, digests);
+            List<Copy> ordered = digests.stream().map(copies::get).toList();
+            Set<String> counting = new HashSet<>();
+            Merge.zones(tables.copies(ordered.stream().map(Copy::zone).distinct().toList()),
+                    minutes(tables).setAside()).values().forEach(zone -> zone.visits().forEach(copy ->
+                    counting.add(copy.digest())));
+            Map<String, JudgedZone> judged = new HashMap<>();
+            judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
+                    .forEach(one -> judged.put(one.copy().digest(), one));
+            return ordered.stream().map(copy -> new FlatRow(copy, counting.contains(copy.digest()),
+                    documents.get(copy.digest()), judge.register(copy.origin().register()),
+                    Optional.ofNullable(judged.get(copy.digest())))).toList();
+        });
+    }
+
+    /** Every version of every register that a survey was made with, by digest. */
+    SortedMap<String, byte[]> registerVersions() {
+        return ask(tables -> {
+            SortedMap<String, byte[]> versions = new TreeMap<>();
+            tables.registers().forEach(digest -> versions.put(digest, tables.register(digest).orElseThrow()));
+            return versions;
+        });
+    }
+
     /** What counts of a zone's surveys. */
     public MergedZone merged(ZoneId zone) {
         return ask(tables -> Effects.merged(tables, zone, minutes(tables)));
@@ -389,6 +477,17 @@ public final class OfficeStore implements AutoCloseable {
     /** A zone's surveys by their digests, with all sides of every clash. */
     public Map<String, Survey> surveys(Collection<String> digests) {
         return ask(tables -> documents(tables, digests));
+    }
+
+    /**
+     * A photo of a survey, from the pack that the survey came in.
+     *
+     * @param content digest of the survey's content
+     * @param sha256  of the photo, as the survey names it
+     * @return nothing where the pack is not here, or can't be read any more
+     */
+    public Optional<byte[]> photo(String content, String sha256) {
+        return ask(tables -> tables.packOf(content)).flatMap(pack -> shelf.photo(pack, sha256, options.limits()));
     }
 
     /** The zone with that id, or with that tag where there is one alone. */

@@ -1,6 +1,7 @@
 package bedmark.office;
 
 import bedmark.document.Defect;
+import bedmark.pack.Receipt;
 import bedmark.survey.merge.Clash;
 import java.nio.file.Path;
 import java.util.List;
@@ -22,16 +23,24 @@ public sealed interface Received {
      * @param known       surveys that were here with the same content
      * @param clashes     what clashes since in the zones that it is about
      * @param clock       how far the tablet's clock was ahead when the bundle was made (s); 0 where it was not
+     * @param receipt     what the office confirms to the tablet; nothing where the bundle has no id to name
      */
     record Taken(Path file, String pack, String device, String fingerprint, int fresh, int known,
-                 List<Clash> clashes, long clock) implements Received {
+                 List<Clash> clashes, long clock, Optional<Receipt> receipt) implements Received {
         public Taken {
             clashes = List.copyOf(clashes);
         }
     }
 
+    /** What the office confirms to the tablet, where it took the pack in, now or before. */
+    default Optional<Receipt> confirmed() {
+        return this instanceof Taken taken ? taken.receipt()
+                : this instanceof AlreadyHere here ? here.receipt() : Optional.empty();
+    }
+
     /** The very same pack was taken in before; nothing was done. */
-    record AlreadyHere(Path file, String pack, String device, String fingerprint) implements Received {
+    record AlreadyHere(Path file, String pack, String device, String fingerprint, Optional<Receipt> receipt)
+            implements Received {
     }
 
     /**

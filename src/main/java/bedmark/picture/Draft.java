@@ -15,12 +15,19 @@ final class Draft {
 
     private final Sheet sheet;
     private final TextMeasure measure;
+    private final boolean still;
     private final List<Mark> marks = new ArrayList<>();
     private final List<Box> taken = new ArrayList<>();
 
-    Draft(Sheet sheet, TextMeasure measure) {
+    /** @param still whether nobody takes hold of anything */
+    Draft(Sheet sheet, TextMeasure measure, boolean still) {
         this.sheet = sheet;
         this.measure = measure;
+        this.still = still;
+    }
+
+    boolean still() {
+        return still;
     }
 
     /** How a text is written. */

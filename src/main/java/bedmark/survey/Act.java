@@ -314,6 +314,25 @@ public sealed interface Act {
         }
     }
 
+    /**
+     * A backup of the whole store was made and proved.
+     *
+     * @param folder where it lies
+     * @param upTo   the last entry that it holds
+     * @param sha256 digest of its list of files, hexadecimal
+     */
+    record BackupMade(String folder, long upTo, String sha256) implements Act {
+        public BackupMade {
+            Objects.requireNonNull(folder);
+            Objects.requireNonNull(sha256);
+        }
+
+        @Override
+        public String code() {
+            return "backup-made";
+        }
+    }
+
     /** The office's receipt for exported surveys was read back. */
     record ReceiptNoted(List<UUID> surveys, Branch receipt) implements Act {
         public ReceiptNoted {

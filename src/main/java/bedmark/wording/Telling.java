@@ -13,7 +13,6 @@ import bedmark.form.FieldForm;
 import bedmark.quantity.Dimension;
 import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.Unit;
-import bedmark.quantity.UnitSystem;
 import bedmark.survey.Readings;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
@@ -72,8 +71,8 @@ public final class Telling {
         if (repeat.standardUncertainty().isEmpty() || dimension.isEmpty()) {
             return wording.text("verdict.repeat", reading);
         }
-        Unit unit = dimension.get() == Dimension.LENGTH ? wording.units().smallLength()
-                : wording.units().unit(dimension.get());
+        Unit unit = dimension.get() == Dimension.LENGTH ? wording.smallLength()
+                : wording.unit(dimension.get());
         return wording.text("verdict.repeat-within", reading,
                 wording.computed(2 * repeat.standardUncertainty().getAsDouble(), unit));
     }
@@ -120,19 +119,29 @@ public final class Telling {
 
     /** A number of a finding in the way in which its rule is spoken of. */
     public String observed(Finding finding, double number) {
-        if (finding.rule() == Rule.SEAL_DEFECT) {
+        return observed(finding.rule(), number);
+    }
+
+    private String observed(Rule rule, double number) {
+        if (rule == Rule.SEAL_DEFECT) {
             return wording.format().computed(number, 0);
         }
-        if (finding.rule() == Rule.BELT_TOO_FAST) {
-            return wording.computed(number, wording.units().unit(Dimension.SPEED));
+        if (rule == Rule.BELT_TOO_FAST) {
+            return wording.computed(number, wording.unit(Dimension.SPEED));
         }
-        return TIMES.contains(finding.rule()) ? wording.format().computed(number, 1) : wording.percent(number);
+        return TIMES.contains(rule) ? wording.format().computed(number, 1) : wording.percent(number);
     }
 
     /** A limit of a finding in the way in which its rule is spoken of. */
     public String limit(Finding finding, double limit) {
         return TIMES.contains(finding.rule()) ? wording.format().exact(BigDecimal.valueOf(limit))
                 : observed(finding, limit);
+    }
+
+    /** A limit as it is set: that of the belt's speed is a share of the speed in its table. */
+    public String setLimit(Rule rule, double limit) {
+        return TIMES.contains(rule) ? wording.format().exact(BigDecimal.valueOf(limit))
+                : rule == Rule.BELT_TOO_FAST ? wording.percent(limit) : observed(rule, limit);
     }
 
     /** Nothing where the verdict rests on what is counted or seen, and not on a reading with an uncertainty. */
@@ -166,12 +175,11 @@ public final class Telling {
     }
 
     private List<Told.Figure> figures(Assessment assessment) {
-        UnitSystem units = wording.units();
         List<Told.Figure> figures = new ArrayList<>();
-        figure(assessment, Result.SKIRT_DRAG, "figure.drag", units.unit(Dimension.FORCE)).ifPresent(figures::add);
+        figure(assessment, Result.SKIRT_DRAG, "figure.drag", wording.unit(Dimension.FORCE)).ifPresent(figures::add);
         boolean atMotor = assessment.get(Result.DRIVE_POWER).isPresent();
         figure(assessment, atMotor ? Result.DRIVE_POWER : Result.SKIRT_POWER,
-                atMotor ? "figure.power-motor" : "figure.power-belt", units.unit(Dimension.POWER))
+                atMotor ? "figure.power-motor" : "figure.power-belt", wording.unit(Dimension.POWER))
                 .ifPresent(figures::add);
         figure(assessment, Result.DRIVE_SHARE, "figure.share", Unit.PERCENT).ifPresent(figures::add);
         assessment.leading().ifPresent(component -> figures.add(leads(assessment, component)));
@@ -222,12 +230,12 @@ public final class Telling {
 
     /** A remedy in one sentence: what is changed, the depth that comes of it, what it saves in a year. */
     public String remedy(Remedy remedy) {
-        Unit small = wording.units().smallLength();
+        Unit small = wording.smallLength();
         String change = remedy.change().isPresent() ? wording.percent(remedy.change().getAsDouble()) : "";
         Optional<Unit> unit = Unit.ofCode(remedy.unit());
         if (unit.isPresent() && remedy.change().isPresent()) {
             change = wording.computed(unit.get().toSi(BigDecimal.valueOf(remedy.change().getAsDouble())),
-                    wording.units().unit(unit.get().dimension()));
+                    wording.unit(unit.get().dimension()));
         }
         String saved = remedy.savedWh().isPresent()
                 ? wording.text("action.saves", wording.text("action.megawatt-hours",

@@ -115,6 +115,10 @@ class RemediesTest {
         assertEquals(1.5 + 1.2 * 2, remedy.change().orElseThrow(), 1e-12);
         assertEquals(power(ZONE) * 3.9 / 6, remedy.skirtPower(), 1e-9 * power(ZONE));
         assertTrue(find(ZONE.with(Datum.IMPACT_LENGTH, 3.6, 0), "shorten-zone").isEmpty());
+        Settings roomy = Settings.standard().with(Settings.standard().limits().with(Rule.ZONE_TOO_SHORT,
+                Limit.ofSite(OptionalDouble.of(1.2), OptionalDouble.empty())));
+        assertEquals(1.2 * 3.9, Engine.assess(ZONE, roomy).remedies().stream()
+                .filter(one -> one.code().equals("shorten-zone")).findFirst().orElseThrow().change().orElseThrow(), 1e-12);
     }
 
     @Test

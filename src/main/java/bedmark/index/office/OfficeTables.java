@@ -157,7 +157,7 @@ public final class OfficeTables implements AutoCloseable {
     /**
      * Takes contents in; those that are there are not touched, but may turn out to have left their tablet earlier.
      *
-     * @return the digests of those that are new
+     * @return the digests of those that are new or turned out so
      */
     public Set<String> add(List<CopyRow> rows) {
         Map<String, CopyRow> fresh = new LinkedHashMap<>();
@@ -165,24 +165,28 @@ public final class OfficeTables implements AutoCloseable {
         Map<String, Copy> known = new HashMap<>();
         link.rows("select " + CopyRow.COLUMNS + " from survey where digest = any(?)", CopyRow::read,
                 link.texts(fresh.keySet())).forEach(copy -> known.put(copy.digest(), copy));
+        Set<String> touched = new HashSet<>();
         for (CopyRow row : rows) {
             Copy before = known.get(row.copy().digest());
-            if (before != null) {
-                move(before, before.or(row.copy()));
+            if (before != null && move(before, before.or(row.copy()))) {
+                touched.add(before.digest());
             }
         }
         fresh.keySet().removeAll(known.keySet());
         fresh.values().forEach(row -> link.batch(CopyRow.INSERT, row.values()));
         link.runBatch(CopyRow.INSERT);
-        return new HashSet<>(fresh.keySet());
+        touched.addAll(fresh.keySet());
+        return touched;
     }
 
-    private void move(Copy before, Copy after) {
-        if (!after.equals(before)) {
-            link.run(MOVED, after.origin().createdAt(), after.origin().register(), after.origin().conveyor(),
-                    CopyRow.drive(after), after.digest());
-            stale(List.of(CopyRow.drive(before), CopyRow.drive(after)));
+    private boolean move(Copy before, Copy after) {
+        if (after.equals(before)) {
+            return false;
         }
+        link.run(MOVED, after.origin().createdAt(), after.origin().register(), after.origin().conveyor(),
+                CopyRow.drive(after), after.digest());
+        stale(List.of(CopyRow.drive(before), CopyRow.drive(after)));
+        return true;
     }
 
     /** Everything that came about some zones. */

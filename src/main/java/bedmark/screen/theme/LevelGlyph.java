@@ -1,5 +1,6 @@
 package bedmark.screen.theme;
 
+import bedmark.picture.LevelFigure;
 import java.util.List;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleObjectProperty;
@@ -8,8 +9,6 @@ import javafx.scene.shape.SVGPath;
 
 /** Shows a level as its miniature cross-section. The words for it come from outside, as its accessible text. */
 public final class LevelGlyph extends Region {
-    private static final double WIDTH = 40;
-    private static final double HEIGHT = 30;
 
     private final ObjectProperty<LevelShape> level;
     private final SVGPath bed = path("bed");
@@ -21,8 +20,8 @@ public final class LevelGlyph extends Region {
     public LevelGlyph(LevelShape first) {
         level = new SimpleObjectProperty<>(this, "level", first);
         setMouseTransparent(true);
-        trough.setContent(LevelShape.Shapes.TROUGH);
-        boards.setContent(LevelShape.Shapes.BOARDS);
+        trough.setContent(LevelFigure.TROUGH);
+        boards.setContent(LevelFigure.BOARDS);
         getChildren().addAll(bed, limit, trough, boards, dashes);
         level.subscribe(this::draw);
     }
@@ -33,9 +32,9 @@ public final class LevelGlyph extends Region {
 
     private void draw(LevelShape shape) {
         getStyleClass().setAll("level-glyph", shape.styleClass());
-        bed.setContent(shape.bed());
-        limit.setContent(shape.limit());
-        dashes.setContent(shape.dashes());
+        bed.setContent(shape.figure().bed());
+        limit.setContent(shape.figure().limit());
+        dashes.setContent(shape.figure().dashes());
     }
 
     private static SVGPath path(String styleClass) {
@@ -47,9 +46,9 @@ public final class LevelGlyph extends Region {
 
     @Override
     protected void layoutChildren() {
-        double scale = Math.min(getWidth() / WIDTH, getHeight() / HEIGHT);
+        double scale = Math.min(getWidth() / LevelFigure.WIDTH, getHeight() / LevelFigure.HEIGHT);
         for (SVGPath path : List.of(bed, limit, trough, boards, dashes)) {
-            Grid.place(path, scale, (getWidth() - WIDTH * scale) / 2, (getHeight() - HEIGHT * scale) / 2);
+            Grid.place(path, scale, (getWidth() - LevelFigure.WIDTH * scale) / 2, (getHeight() - LevelFigure.HEIGHT * scale) / 2);
         }
     }
 }

@@ -11,6 +11,7 @@ import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import bedmark.screen.theme.Density;
 import bedmark.wording.Wording;
+import bedmark.wording.ZoneSketcher;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
@@ -30,7 +31,7 @@ final class PicturePane extends StackPane {
     PicturePane(ZoneModel model, Wording wording, Density density) {
         this.model = model;
         this.wording = wording;
-        this.sketcher = new ZoneSketcher(model.setting(), wording);
+        this.sketcher = new ZoneSketcher(model.setting().assessor(), wording);
         this.view = new ZonePictureView(sketch(), density, new Finger());
         this.tools = new PictureTools(wording, new Buttons());
         view.setId("zone-picture");

@@ -217,7 +217,7 @@ final class RowView extends VBox {
         }
         return slot.equals(model.active()) ? model.inHandProperty().get().unit().orElseThrow()
                 : model.answer(slot).flatMap(SlotWords::quantity).map(Quantity::unit)
-                        .orElse(measured.measure().unit(model.unitsProperty().get()));
+                        .orElse(model.offered(measured.measure()));
     }
 
     private Judgement judged(Slot slot, boolean active) {

@@ -63,6 +63,7 @@ public final class ZoneView implements Screen {
         this.wording = workplace.wording();
         model.unitsProperty().set(wording.units());
         model.localeProperty().set(wording.words().locale());
+        model.likeUnits(wording::liked);
         this.form = new FormPane(model, wording, listening, large && model.open());
         this.history = new HistoryPopOver(model, wording);
         this.entry = new EntryPane(model, wording, listening, this::showHistory);
@@ -179,7 +180,10 @@ public final class ZoneView implements Screen {
         ActionButton list = ActionButton.of(Icon.LIST, Weight.QUIET, wording.text("screen.round.title"),
                 () -> navigator.toRound(round));
         list.setId("foot-round");
-        HBox middle = new HBox(list, ticks);
+        ActionButton notes = ActionButton.of(Icon.NOTES, Weight.QUIET, wording.text("notes.title"),
+                () -> round.row(transfer).ifPresent(row -> navigator.toNotes(round, row)));
+        notes.setId("foot-notes");
+        HBox middle = new HBox(list, notes, ticks);
         middle.getStyleClass().add("foot-middle");
         Optional<RoundRow> next = round.nextToDo(transfer);
         String words = !model.open()

@@ -128,7 +128,7 @@ class ThemeTest {
     void everyLevelHasAShapeOfItsOwn() {
         Set<String> shapes = new HashSet<>();
         for (LevelShape level : LevelShape.values()) {
-            shapes.add(level.bed() + level.limit() + level.dashes());
+            shapes.add(level.figure().bed() + level.figure().limit() + level.figure().dashes());
         }
         assertEquals(LevelShape.values().length, shapes.size());
     }

@@ -1,4 +1,4 @@
-package bedmark.screen.zone;
+package bedmark.wording;
 
 import bedmark.document.Branch;
 import bedmark.document.Node;
@@ -19,8 +19,8 @@ import bedmark.picture.ZoneSketch;
 import bedmark.quantity.Dimension;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
+import bedmark.survey.Assessor;
 import bedmark.survey.Survey;
-import bedmark.wording.Wording;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.util.ArrayList;
@@ -30,12 +30,12 @@ import java.util.OptionalDouble;
 import java.util.OptionalInt;
 
 /** Draws up what is known of a survey for its zone picture: numbers as the engine sees them, words as people do. */
-final class ZoneSketcher {
-    private final ZoneSetting setting;
+public final class ZoneSketcher {
+    private final Assessor assessor;
     private final Wording wording;
 
-    ZoneSketcher(ZoneSetting setting, Wording wording) {
-        this.setting = setting;
+    public ZoneSketcher(Assessor assessor, Wording wording) {
+        this.assessor = assessor;
         this.wording = wording;
     }
 
@@ -44,7 +44,7 @@ final class ZoneSketcher {
      *
      * @param active the line of the table of depths that the person has in hand
      */
-    ZoneSketch sketch(Branch document, Optional<Assessment> assessment, Optional<Integer> active) {
+    public ZoneSketch sketch(Branch document, Optional<Assessment> assessment, Optional<Integer> active) {
         LoadingZone zone = zone(document);
         OptionalDouble length = number(zone, Datum.ZONE_LENGTH);
         OptionalDouble height = number(zone, Datum.READ_HEIGHT, Datum.REGISTER_HEIGHT);
@@ -64,9 +64,9 @@ final class ZoneSketcher {
     /** The engine's zone; while something in it is impossible, the picture shows what the register knows. */
     private LoadingZone zone(Branch document) {
         try {
-            return setting.assessor().zone(new Survey(document));
+            return assessor.zone(new Survey(document));
         } catch (Refused e) {
-            return setting.assessor().zone(new Survey(document.with("readings", Branch.EMPTY)));
+            return assessor.zone(new Survey(document.with("readings", Branch.EMPTY)));
         }
     }
 
@@ -101,8 +101,8 @@ final class ZoneSketcher {
         return stations;
     }
 
-    /** The line of the table that each station of {@link #stations} stands for. */
-    static List<Integer> lines(Branch document) {
+    /** The line of the table that each station of the sketch stands for. */
+    public static List<Integer> lines(Branch document) {
         List<Integer> lines = new ArrayList<>();
         List<Node> rows = document.at(Survey.READINGS.child("bedDepths"))
                 .filter(Node.Series.class::isInstance).map(node -> ((Node.Series) node).items()).orElse(List.of());
@@ -136,10 +136,10 @@ final class ZoneSketcher {
     private Captions captions(LoadingZone zone, OptionalDouble length, OptionalDouble height, OptionalDouble spacing,
                               OptionalDouble speed, Optional<AllowedDepth> allowed,
                               List<ZoneSketch.Station> stations) {
-        Unit metres = wording.units().unit(Dimension.LENGTH);
+        Unit metres = wording.unit(Dimension.LENGTH);
         return new Captions(wording.text("screen.picture.feed"),
                 speed.isPresent() ? wording.text("screen.picture.belt",
-                        wording.computed(speed.getAsDouble(), wording.units().unit(Dimension.SPEED)))
+                        wording.computed(speed.getAsDouble(), wording.unit(Dimension.SPEED)))
                         : wording.text("screen.picture.belt-unknown"),
                 height.isPresent() ? small(height.getAsDouble()) : "",
                 wording.text(height.isPresent() ? "screen.picture.board-top" : "screen.picture.board-unknown"),
@@ -168,7 +168,7 @@ final class ZoneSketcher {
 
     /** A depth or width as a bare number of the small unit; the picture's captions share one unit. */
     private String small(double metres) {
-        Unit unit = wording.units().smallLength();
+        Unit unit = wording.smallLength();
         return unit == Unit.MILLIMETRE ? wording.format().computed(unit.fromSi(metres), 0)
                 : wording.format().computed(metres, unit);
     }

@@ -1,4 +1,4 @@
-package bedmark.screen.zone;
+package bedmark.wording;
 
 import bedmark.engine.Datum;
 import bedmark.engine.LoadingZone;
@@ -8,7 +8,6 @@ import bedmark.engine.seal.SealSegment;
 import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Reading;
 import bedmark.engine.uncertainty.Uncertain;
-import bedmark.wording.Wording;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.DoubleFunction;

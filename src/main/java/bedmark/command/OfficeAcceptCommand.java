@@ -1,0 +1,74 @@
+package bedmark.command;
+
+import bedmark.engine.verdict.Rule;
+import bedmark.office.Findings;
+import bedmark.office.OfficeStore;
+import bedmark.survey.OfficeDeed;
+import bedmark.survey.merge.ZoneId;
+import java.time.LocalDate;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
+
+/** Accepts or shelves a finding, or takes that back. */
+@Command(name = "accept", mixinStandardHelpOptions = true,
+        description = "Accepts or shelves a finding. It comes back when it is worse, or when the day has passed.")
+final class OfficeAcceptCommand implements Callable<Integer> {
+    private final Surroundings surroundings;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Mixin
+    private OfficeDesk desk;
+
+    @Parameters(index = "0", paramLabel = "TRANSFER", description = "The transfer point's id or tag.")
+    private String transfer;
+
+    @Parameters(index = "1", paramLabel = "RULE", description = "The finding's rule, such as bed-over-design.")
+    private String rule;
+
+    @Option(names = "--reason", paramLabel = "TEXT", required = true, description = "Why.")
+    private String reason;
+
+    @Option(names = "--until", paramLabel = "DAY", description = "The last day on which it stays away (2027-01-31).")
+    private Optional<LocalDate> until;
+
+    @Option(names = "--shelve", description = "Look again at the day instead of living with it.")
+    private boolean shelve;
+
+    @Option(names = "--reopen", description = "Take an earlier answer back.")
+    private boolean reopen;
+
+    OfficeAcceptCommand(Surroundings surroundings) {
+        this.surroundings = surroundings;
+    }
+
+    @Override
+    public Integer call() {
+        Rule known = Rule.ofCode(rule).orElseThrow(() ->
+                new ParameterException(spec.commandLine(), "there is no rule '" + rule + "'"));
+        try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
+                progress)) {
+            ZoneId zone = OfficeDesk.zone(store, transfer);
+            Findings findings = new Findings(store);
+            if (reopen) {
+                findings.reopen(zone, known, reason, desk.person());
+            } else {
+                findings.answer(zone, known, shelve ? OfficeDeed.Answer.SHELVED : OfficeDeed.Answer.ACCEPTED, reason,
+                        desk.person(), until, LocalDate.now(surroundings.clock()));
+            }
+            progress.done();
+            surroundings.out().println(surroundings.words().text("office.accept." + (reopen ? "reopened"
+                    : shelve ? "shelved" : "accepted"), transfer, surroundings.words().text("rule." + rule),
+                    until.map(LocalDate::toString).orElse("-")));
+        }
+        return ExitCode.FINE;
+    }
+}

@@ -1,0 +1,122 @@
+package bedmark.office;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Node;
+import bedmark.document.Refused;
+import bedmark.json.AssessmentWriter;
+import bedmark.json.JsonWriter;
+import bedmark.journal.Progress;
+import bedmark.office.FlatColumn.FlatRow;
+import java.io.IOException;
+import java.io.Writer;
+import java.net.URLEncoder;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardOpenOption;
+import java.time.Instant;
+import java.time.ZoneOffset;
+import java.time.format.DateTimeFormatter;
+import java.util.List;
+import java.util.Map;
+import java.util.SortedMap;
+import java.util.TreeMap;
+
+/**
+ * Everything that came, as files that any analysis engine reads: line-delimited JSON with the whole survey and its
+ * assessment, and a flat CSV table with a data dictionary, both in folders {@code plant=…/month=…}. Nothing in them
+ * depends on the order in which packs came, so that two offices that received the same write the same bytes.
+ */
+public final class OfficeExport {
+    private static final int AT_ONCE = 500;
+    private static final DateTimeFormatter MONTH = DateTimeFormatter.ofPattern("yyyy-MM").withZone(ZoneOffset.UTC);
+
+    private final OfficeStore store;
+
+    public OfficeExport(OfficeStore store) {
+        this.store = store;
+    }
+
+    /**
+     * Writes the export.
+     *
+     * @param out a folder that is not there yet, or is empty
+     * @return the number of surveys
+     * @throws Refused {@code export-folder-full}, {@code export-not-saved}
+     */
+    public long write(Path out, Progress progress) {
+        try {
+            Files.createDirectories(out);
+            try (var held = Files.list(out)) {
+                if (held.findAny().isPresent()) {
+                    throw new Refused(Defect.in(out.toString(), "export-folder-full"));
+                }
+            }
+            Files.writeString(out.resolve("data-dictionary.csv"), dictionary());
+            registers(out.resolve("registers"));
+            return surveys(out, progress);
+        } catch (IOException e) {
+            throw new Refused(Defect.in(out.toString(), "export-not-saved", String.valueOf(e.getMessage())), e);
+        }
+    }
+
+    private static String dictionary() {
+        StringBuilder text = new StringBuilder(Csv.row(List.of("column", "type", "unit", "says")));
+        FlatColumn.ALL.forEach(column ->
+                text.append(Csv.row(List.of(column.name(), column.type(), column.unit(), column.says()))));
+        return text.toString();
+    }
+
+    private void registers(Path folder) throws IOException {
+        Files.createDirectories(folder);
+        for (Map.Entry<String, byte[]> register : store.registerVersions().entrySet()) {
+            Files.write(folder.resolve(register.getKey() + ".json"), register.getValue());
+        }
+    }
+
+    private long surveys(Path out, Progress progress) throws IOException {
+        List<String> digests = store.contents();
+        for (int from = 0; from < digests.size(); from += AT_ONCE) {
+            progress.at(from, digests.size());
+            SortedMap<String, StringBuilder> json = new TreeMap<>();
+            SortedMap<String, StringBuilder> table = new TreeMap<>();
+            for (FlatRow row : store.rows(digests.subList(from, Math.min(digests.size(), from + AT_ONCE)))) {
+                String part = "plant=" + URLEncoder.encode(row.copy().zone().plant(), StandardCharsets.UTF_8)
+                        + "/month=" + MONTH.format(Instant.ofEpochMilli(row.copy().moment()));
+                json.computeIfAbsent(part, key -> new StringBuilder()).append(line(row)).append('\n');
+                table.computeIfAbsent(part, key -> new StringBuilder()).append(Csv.row(FlatColumn.ALL.stream()
+                        .map(column -> column.cell().apply(row)).toList()));
+            }
+            append(out.resolve("json"), "surveys.jsonl", json, "");
+            append(out.resolve("table"), "surveys.csv", table,
+                    Csv.row(FlatColumn.ALL.stream().map(FlatColumn::name).toList()));
+        }
+        progress.at(digests.size(), digests.size());
+        return digests.size();
+    }
+
+    private static void append(Path folder, String name, SortedMap<String, StringBuilder> parts, String head)
+            throws IOException {
+        for (Map.Entry<String, StringBuilder> part : parts.entrySet()) {
+            Path file = folder.resolve(part.getKey()).resolve(name);
+            boolean begun = Files.exists(file);
+            Files.createDirectories(file.getParent());
+            try (Writer writer = Files.newBufferedWriter(file, StandardOpenOption.CREATE, StandardOpenOption.APPEND)) {
+                writer.append(begun ? "" : head).append(part.getValue());
+            }
+        }
+    }
+
+    private static String line(FlatRow row) {
+        Branch branch = Branch.EMPTY.with("content", row.copy().digest())
+                .with("plant", row.copy().zone().plant())
+                .with("register", row.copy().origin().register())
+                .with("counts", Node.flag(row.counts()))
+                .with("survey", row.survey().document());
+        if (row.judged().isPresent()) {
+            branch = branch.with("assessment", AssessmentWriter.write(row.judged().get().assessment()));
+        }
+        return new String(JsonWriter.compact(branch), StandardCharsets.UTF_8);
+    }
+}

@@ -12,6 +12,7 @@ public final class Benchmarks {
                     new AssessmentSuite(),
                     new ParallelSuite(),
                     new GrowthSuite(),
+                    new ScreenSuite(),
                     new SaveSuite(),
                     new StartSuite(),
                     new ExportSuite(),

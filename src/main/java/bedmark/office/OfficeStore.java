@@ -242,7 +242,7 @@ public final class OfficeStore implements AutoCloseable {
         Intake intake = Intake.of(pack.bundle(), laid.sha256());
         OfficeDeed deed = new OfficeDeed.PackReceived(laid.sha256(), file.getFileName().toString(), laid.bytes(),
                 fingerprint, document.uuid("id"), document.time("createdAt"), sender.uuid("id"), name);
-        Set<String> before = ask(tables -> Set.copyOf(tables.copiesOf(digests(intake)).keySet()));
+        Set<String> before = ask(tables -> tables.known(digests(intake)));
         Optional<Entry> entry = keep(tables -> tables.hasPack(laid.sha256()), () -> shelf.keep(laid),
                 new Books.Deed(person, deed, Optional.of(intake)));
         shelf.passed(laid.sha256());
@@ -296,8 +296,8 @@ public final class OfficeStore implements AutoCloseable {
     private List<Clash> clashes(Intake intake) {
         Set<ZoneId> zones = new HashSet<>();
         intake.copies().forEach(row -> zones.add(row.copy().zone()));
-        return ask(tables -> Merge.zones(tables.copies(zones), minutes(tables).setAside()).values().stream()
-                .flatMap(zone -> zone.clashes().stream()).toList());
+        return ask(tables -> Merge.zones(tables.copies(tables.clashing(zones)), minutes(tables).setAside())
+                .values().stream().flatMap(zone -> zone.clashes().stream()).toList());
     }
 
     private static long ahead(Branch bundle, OffsetDateTime now) {

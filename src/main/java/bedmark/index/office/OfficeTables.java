@@ -300,6 +300,18 @@ public final class OfficeTables implements AutoCloseable {
         link.runBatch(STANDS);
     }
 
+    /** Those of the zones that hold contents that clash. */
+    public List<ZoneId> clashing(Collection<ZoneId> zones) {
+        return link.rows("select zone from zone where zone = any(?) and clashes > 0",
+                row -> ZoneId.ofKey(row.getString(1)), link.texts(zones.stream().map(ZoneId::key).toList()));
+    }
+
+    /** Which of these contents are here. */
+    public Set<String> known(Collection<String> digests) {
+        return new HashSet<>(link.rows("select digest from survey where digest = any(?)", row -> row.getString(1),
+                link.texts(digests)));
+    }
+
     /** Zones that wait to be judged, at most so many. */
     public List<ZoneId> waiting(int atMost) {
         return link.rows("select zone from zone where judged = false order by zone limit ?",

@@ -16,7 +16,8 @@ public final class Benchmarks {
                     new SaveSuite(),
                     new StartSuite(),
                     new ExportSuite(),
-                    new WindowSuite());
+                    new WindowSuite(),
+                    new OfficeSuite());
 
     private Benchmarks() {
     }

@@ -2,8 +2,6 @@ package bedmark;
 
 import bedmark.command.BedmarkCommand;
 import bedmark.command.Surroundings;
-import bedmark.diary.Diary;
-import bedmark.diary.Happening;
 import bedmark.index.Store;
 import bedmark.index.StoreFolder;
 import bedmark.index.StoreOptions;
@@ -14,9 +12,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
-import java.util.Map;
 import java.util.Optional;
-import java.util.function.BooleanSupplier;
 import java.util.logging.Level;
 import java.util.logging.Logger;
 
@@ -44,22 +40,14 @@ public final class Bedmark {
         }
         TOOLKIT.setLevel(Level.SEVERE);
         Clock clock = Clock.systemDefaultZone();
+        BedmarkApp.prepare();
         StoreOptions options = BedmarkApp.options(clock);
-        Diary diary = new Diary(folder, clock);
         if (new StoreFolder(folder, options).sealed()) {
-            return noted(diary, () -> BedmarkApp.unlock(folder, passphrase -> Store.open(folder,
-                    options.withPassphrase(Optional.of(passphrase))), diary, clock, samples));
+            return BedmarkApp.unlock(folder, passphrase -> Store.open(folder,
+                    options.withPassphrase(Optional.of(passphrase))), clock, samples);
         }
         try (Store store = Store.open(folder, options)) {
-            return noted(diary, () -> BedmarkApp.open(store, diary, clock, samples, load));
+            return BedmarkApp.open(store, clock, samples, load);
         }
-    }
-
-    private static boolean noted(Diary diary, BooleanSupplier showing) {
-        Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> diary.note(failure));
-        diary.note(Happening.STORE_OPENED, Map.of());
-        boolean shown = showing.getAsBoolean();
-        diary.note(Happening.STORE_CLOSED, Map.of());
-        return shown;
     }
 }

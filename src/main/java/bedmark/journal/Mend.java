@@ -132,7 +132,7 @@ final class Mend {
     }
 
     private void copy(Found.Bad torn, Path kept) throws IOException {
-        try (FileLayer.Input input = files.read(last.path()); FileLayer.Output output = files.create(kept)) {
+        try (FileLayer.Input input = files.read(last.path()); FileLayer.Output output = files.createPrivate(kept)) {
             long at = torn.offset();
             long end = torn.offset() + torn.length();
             while (at < end) {

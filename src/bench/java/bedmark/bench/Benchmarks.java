@@ -9,7 +9,7 @@ import java.util.List;
 public final class Benchmarks {
     private static final List<Suite> SUITES =
             List.of(new AssessmentSuite(), new ParallelSuite(), new GrowthSuite(),
-                    new SaveSuite());
+                    new SaveSuite(), new ReportSuite());
 
     private Benchmarks() {
     }

@@ -12,16 +12,24 @@ import org.openjdk.jmh.annotations.OutputTimeUnit;
 import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.State;
 
-/** A full assessment: four stations, both sides sealed, with remedies, without Monte Carlo. */
+/** A full assessment: four stations, both sides sealed, with remedies, without Monte Carlo and with it. */
 @State(Scope.Benchmark)
 @BenchmarkMode(Mode.SampleTime)
 @OutputTimeUnit(TimeUnit.MICROSECONDS)
 public class AssessmentBenchmark {
     private final LoadingZone zone = BenchZones.of(4);
+    private final LoadingZone coarse = BenchZones.coarse(4);
     private final Settings settings = Settings.standard();
+    private final Settings firstOrder = settings.with(settings.conventions().withTrials(0));
 
     @Benchmark
     public Assessment assess() {
-        return Engine.assess(zone, settings);
+        return Engine.assess(zone, firstOrder);
+    }
+
+    /** The same zone with depths so coarse that its rules are drawn. */
+    @Benchmark
+    public Assessment assessByDrawing() {
+        return Engine.assess(coarse, settings);
     }
 }

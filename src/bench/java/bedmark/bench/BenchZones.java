@@ -34,6 +34,15 @@ final class BenchZones {
     }
 
     static LoadingZone of(int stations) {
+        return of(stations, 0.33, 0.005);
+    }
+
+    /** The same with a bed near its limit and depths that were sighted from afar. */
+    static LoadingZone coarse(int stations) {
+        return of(stations, 0.18, 0.025);
+    }
+
+    private static LoadingZone of(int stations, double depth, double uncertainty) {
         Map<Datum, Reading> data = new EnumMap<>(Datum.class);
         NUMBERS.forEach((datum, value) ->
                 data.put(datum, Instruments.standard().reading(datum.pointer(), value, datum.instrument())));
@@ -42,7 +51,8 @@ final class BenchZones {
                 .withSeal(Side.LEFT, SealType.VERTICAL, SealCondition.SOUND, 6, 0.005)
                 .withSeal(Side.RIGHT, SealType.OBLIQUE, SealCondition.SOUND, 6, 0.005);
         for (int i = 0; i < stations; i++) {
-            zone = zone.withStation(6 * (i + 0.5) / stations, 0.33 + 0.01 * (i % 4), DepthMethod.AT_BOARD, 0.005);
+            zone = zone.withStation(6 * (i + 0.5) / stations, depth + 0.01 * (i % 4), DepthMethod.AT_BOARD,
+                    uncertainty);
         }
         return zone;
     }

@@ -8,8 +8,15 @@ import java.util.List;
 /** Runs the suites and writes their figures beside their budgets. */
 public final class Benchmarks {
     private static final List<Suite> SUITES =
-            List.of(new AssessmentSuite(), new ParallelSuite(), new GrowthSuite(),
-                    new SaveSuite(), new ReportSuite());
+            List.of(
+                    new AssessmentSuite(),
+                    new ParallelSuite(),
+                    new GrowthSuite(),
+                    new SaveSuite(),
+                    new ReportSuite(),
+                    new StartSuite(),
+                    new ExportSuite(),
+                    new WindowSuite());
 
     private Benchmarks() {
     }

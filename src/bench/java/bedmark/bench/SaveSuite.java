@@ -6,6 +6,7 @@ import bedmark.document.Pointer;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
 import bedmark.journal.FileLayer;
+import bedmark.journal.QuickLayer;
 import bedmark.survey.Act;
 import bedmark.survey.Survey;
 import java.io.IOException;
@@ -16,6 +17,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Random;
 import java.util.UUID;
 
 /**
@@ -24,7 +26,8 @@ import java.util.UUID;
  */
 final class SaveSuite implements Suite {
     private static final int SAVES = Integer.getInteger("bench.saves", 3_000);
-    private static final int WARM_UP = 1_000;
+    private static final int WARM_UP = 200;
+    private static final int QUICK_WARM_UP = 20_000;
     private static final int ANSWERS = 40;
     private static final long PAUSE_MILLIS = 3;
 
@@ -35,30 +38,45 @@ final class SaveSuite implements Suite {
 
     @Override
     public List<Row> run() throws IOException, InterruptedException {
+        warmUp();
         try (BenchFolder folder = BenchFolder.make("save");
              Store store = Store.open(folder.path().resolve("store"), StoreOptions.of("bench"));
              FileLayer.Output raw = FileLayer.disk().create(folder.path().resolve("raw"))) {
             long[] saves = new long[SAVES];
             long[] writes = new long[SAVES];
             Typist typist = new Typist(store);
+            Random turns = new Random(1);
             Path segment = folder.path().resolve("store/journal/00000001.journal");
             for (int i = -WARM_UP; i < SAVES; i++) {
-                long before = segment.toFile().length();
-                boolean first = (i * 2654435761L >>> 7) % 2 == 0;
+                boolean first = turns.nextBoolean();
                 long write = first ? write(raw, typist.bytes()) : 0;
+                long before = segment.toFile().length();
                 Act act = typist.next();
+                Thread.sleep(PAUSE_MILLIS);
                 long start = System.nanoTime();
                 store.append("R. Okafor", act);
                 long save = System.nanoTime() - start;
                 typist.wrote((int) (segment.toFile().length() - before));
                 Thread.sleep(PAUSE_MILLIS);
                 write = first ? write : write(raw, typist.bytes());
+                Thread.sleep(PAUSE_MILLIS);
                 if (i >= 0) {
                     saves[i] = save;
                     writes[i] = write;
                 }
             }
             return rows(saves, writes);
+        }
+    }
+
+    /** The code is compiled by work that waits for no medium. */
+    private static void warmUp() throws IOException {
+        try (BenchFolder folder = BenchFolder.make("warm-up");
+             Store store = Store.open(folder.path(), StoreOptions.of("bench").withFiles(new QuickLayer()))) {
+            Typist typist = new Typist(store);
+            for (int i = 0; i < QUICK_WARM_UP; i++) {
+                store.append("R. Okafor", typist.next());
+            }
         }
     }
 

@@ -6,6 +6,8 @@ final class ExitCode {
     static final int FINE = 0;
     /** Something is overloaded. */
     static final int OVERLOADED = 1;
+    /** Some surveys are known with another content; of commands that take surveys in. */
+    static final int DIFFERING = 1;
     /** The call's words are off. */
     static final int BAD_USE = 2;
     /** An input can't be read; the reason stands on standard error in one line. */

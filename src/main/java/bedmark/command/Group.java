@@ -40,7 +40,8 @@ abstract class Group implements Callable<Integer> {
     }
 
     /** Stores. */
-    @Command(name = "store", mixinStandardHelpOptions = true, description = "Proves and rebuilds a store.")
+    @Command(name = "store", mixinStandardHelpOptions = true, 
+            description = "Proves, rebuilds, backs up, restores and encrypts a store; reads the office's receipts.")
     static final class StoreGroup extends Group {
     }
 }

@@ -6,6 +6,7 @@ import bedmark.survey.LevelWord;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Parameters;
 
 /** Throws a store's index away and makes it anew from the journal. */
@@ -17,6 +18,9 @@ final class StoreRebuildCommand implements Callable<Integer> {
     @Parameters(paramLabel = "DIR", description = "The store's folder.")
     private Path folder;
 
+    @Mixin
+    private PassphraseOption passphrase = new PassphraseOption();
+
     StoreRebuildCommand(Surroundings surroundings) {
         this.surroundings = surroundings;
     }
@@ -26,7 +30,8 @@ final class StoreRebuildCommand implements Callable<Integer> {
         long entries;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             entries = Store.rebuild(folder, StoreOptions.of("").withClock(surroundings.clock())
-                    .withLevels(new LevelWord()::of).withProgress(progress::at));
+                    .withLevels(new LevelWord()::of).withPassphrase(passphrase.of(folder, surroundings))
+                    .withProgress(progress::at));
         }
         surroundings.out().println(surroundings.words().text("command.store.rebuilt", folder, entries));
         return ExitCode.FINE;

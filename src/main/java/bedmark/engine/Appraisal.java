@@ -49,6 +49,22 @@ final class Appraisal {
         return today.profile().isKnown() && Assumptions.isCoarse(points(today.profile().get()));
     }
 
+    /** Whether more than one station may be the deepest: the greatest of several numbers is no straight line either. */
+    boolean isContested() {
+        return today.profile().isKnown() && today.profile().get().stations() > 1 && today.profile().get().isContested(
+                points(today.profile().get()).stream().mapToDouble(point -> point.depth().standardUncertainty())
+                        .toArray());
+    }
+
+    /** Judges the rules on the depth by drawing their readings. */
+    void drawDepths(Findings.AtFeeds judged, Hypercube cube) {
+        Hypercube.Zone readings = cube.zone(tape);
+        judged.today().draw(new DrawnBed(today, readings));
+        if (design.isPresent() && judged.atDesign().isPresent()) {
+            judged.atDesign().get().draw(new DrawnBed(design.get(), readings));
+        }
+    }
+
     /** The rules at today's feed and, where it can be known, at design throughput. */
     Findings.AtFeeds judge(Optional<ConveyorLoad> loadToday, Optional<ConveyorLoad> loadAtDesign) {
         Findings findings = Findings.today(today, loadToday);

@@ -12,21 +12,21 @@ import bedmark.engine.uncertainty.Reading;
  * @param lengths   the conventions for the length of a zone
  * @param incline   whether the slope of the belt counts in the acceleration length; the standard's own form is level
  * @param spread    whether the disagreement of the methods counts in verdicts on power
- * @param trials    of the Monte Carlo method where a verdict rests on depths too uncertain for the first order; 0, the
- *                  default, for never: a tablet answers each key within a frame
+ * @param trials    of the Monte Carlo method where a verdict rests on depths too uncertain for the first order, or on
+ *                  the deepest of several that are nearly as deep; 0 for never
  */
 public record Conventions(Reading beltGrip, Reading boardGrip, LengthConventions lengths, boolean incline,
         boolean spread, int trials) {
     /** Most trials that a site may ask for. */
-    public static final int MOST_TRIALS = 1_000_000;
+    public static final int MOST_TRIALS = 100_000;
 
     /** Half the published range of 0.5–0.7, taken as equally likely all over (JCGM 100, 4.3.7) [D]. */
     private static final double GRIP_SPREAD = 0.1 / Math.sqrt(3);
     private static final Conventions STANDARD = new Conventions(
             new Reading("/plant/limits/beltGrip", 0.6, GRIP_SPREAD),
-            new Reading("/plant/limits/boardGrip", 0.6, GRIP_SPREAD), LengthConventions.ALL, true, true, 0);
+            new Reading("/plant/limits/boardGrip", 0.6, GRIP_SPREAD), LengthConventions.ALL, true, true, 1_000);
 
-    /** @throws ImpossibleReading where a factor is not above 0 and up to 1, or the trials are not 0…1 000 000 */
+    /** @throws ImpossibleReading where a factor is not above 0 and up to 1, or the trials are not 0…100 000 */
     public Conventions {
         Domain.EFFICIENCY.check(beltGrip);
         Domain.EFFICIENCY.check(boardGrip);

@@ -16,10 +16,6 @@ import java.util.function.Function;
 
 /** The assessment of one conveyor in the making: its zones are computed first, and judged once their sum is known. */
 final class ConveyorAppraisal {
-    /** Any number would do; it is the same everywhere, so that a verdict is. */
-    private static final long SEED = 20_260_101;
-    /** What a zone's own depths decide. */
-    private static final Set<Rule> OF_DEPTHS = EnumSet.of(Rule.BED_OVER_BOARD, Rule.BED_OVER_DESIGN);
     private static final Set<Rule> OF_ALL_ZONES = EnumSet.of(Rule.SKIRTS_OVER_BUDGET);
 
     private final List<LoadingZone> zones;
@@ -67,8 +63,9 @@ final class ConveyorAppraisal {
     /** Each zone by itself, so that its verdict does not hang on which others were surveyed with it. */
     private void drawDepths(List<Findings.AtFeeds> findings) {
         for (int i = 0; i < zones.size(); i++) {
-            if (findings.get(i).isDoubtful(OF_DEPTHS) && appraisals.get(i).isCoarse()) {
-                findings.get(i).judge(OF_DEPTHS, trials(zones.subList(i, i + 1), OF_DEPTHS).get(0));
+            Appraisal zone = appraisals.get(i);
+            if (findings.get(i).isDoubtful(Findings.OF_DEPTHS) && (zone.isCoarse() || zone.isContested())) {
+                zone.drawDepths(findings.get(i), new Hypercube(settings.conventions().trials()));
             }
         }
     }
@@ -79,15 +76,12 @@ final class ConveyorAppraisal {
             doubtful |= zone.isDoubtful(OF_ALL_ZONES);
         }
         if (doubtful && appraisals.stream().anyMatch(Appraisal::isCoarse)) {
-            List<MonteCarlo> drawn = trials(zones, OF_ALL_ZONES);
-            for (int i = 0; i < zones.size(); i++) {
-                findings.get(i).judge(OF_ALL_ZONES, drawn.get(i));
+            DrawnLoad drawn = DrawnLoad.of(appraisals, new Hypercube(settings.conventions().trials()));
+            for (Findings.AtFeeds zone : findings) {
+                zone.today().draw(Rule.SKIRTS_OVER_BUDGET, drawn.today());
+                zone.atDesign().ifPresent(design -> design.draw(Rule.SKIRTS_OVER_BUDGET, drawn.atDesign()));
             }
         }
-    }
-
-    private List<MonteCarlo> trials(List<LoadingZone> drawn, Set<Rule> rules) {
-        return new Trials(drawn, settings, settings.conventions().trials(), rules, false).run(SEED);
     }
 
     private Map<Result, Estimate> sums() {

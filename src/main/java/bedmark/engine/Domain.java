@@ -33,6 +33,16 @@ public enum Domain {
         this.highest = highest;
     }
 
+    /** The least that the number may be. */
+    double lowest() {
+        return lowest;
+    }
+
+    /** The most that it may be. */
+    double highest() {
+        return highest;
+    }
+
     /** Whether the number may be. */
     boolean holds(double value) {
         return value >= lowest && value <= highest && !(lowest == 0 && value > 0 && value < LEAST);

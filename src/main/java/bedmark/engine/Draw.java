@@ -46,7 +46,7 @@ final class Draw {
     }
 
     /** What a reading may be: what its datum says; positions and depths may be 0, lengths of seal and rates may not. */
-    private static Domain domain(Reading reading) {
+    static Domain domain(Reading reading) {
         return Datum.ofPointer(reading.name()).map(Datum::domain).orElseGet(() ->
                 reading.name().startsWith(ZoneFacts.DEPTHS) ? Domain.NOT_NEGATIVE
                         : reading.name().startsWith("/plant/limits/") ? Domain.EFFICIENCY : Domain.POSITIVE);

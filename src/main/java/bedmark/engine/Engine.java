@@ -1,9 +1,7 @@
 package bedmark.engine;
 
 import bedmark.engine.uncertainty.ImpossibleReading;
-import bedmark.engine.verdict.Rule;
 import bedmark.engine.working.Working;
-import java.util.EnumSet;
 import java.util.List;
 
 /** The way into the engine: pure functions. */
@@ -38,7 +36,7 @@ public final class Engine {
      *
      * @param zones  each with the same conveyor
      * @param seed   the same seed gives the same numbers on every device
-     * @param trials how often, 1…1 000 000
+     * @param trials how often, 1…100 000
      * @return one for each zone, in their order
      * @throws ImpossibleReading where a reading cannot be, or {@code trials-impossible}
      */
@@ -48,7 +46,7 @@ public final class Engine {
                     Integer.toString(trials), Integer.toString(Conventions.MOST_TRIALS));
         }
         zones.forEach(Engine::check);
-        return new Trials(zones, settings, trials, EnumSet.allOf(Rule.class), true).run(seed);
+        return new Trials(zones, settings, trials).run(seed);
     }
 
     /**

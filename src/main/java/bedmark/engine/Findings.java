@@ -14,7 +14,9 @@ import bedmark.engine.verdict.Repeat;
 import bedmark.engine.verdict.Rule;
 import java.util.ArrayList;
 import java.util.Collection;
+import java.util.Collections;
 import java.util.EnumMap;
+import java.util.EnumSet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -27,6 +29,9 @@ final class Findings {
     private static final String OF_THIS_WALK = "/readings/";
     private static final String HOPPER = "hopper-load-outside";
     private static final Rule[] RULES = Rule.values();
+    /** What a zone's own depths decide. */
+    static final Set<Rule> OF_DEPTHS = Collections.unmodifiableSet(
+            EnumSet.of(Rule.BED_OVER_BOARD, Rule.BED_OVER_DESIGN));
 
     /**
      * The rules of a zone at both feeds.
@@ -37,11 +42,6 @@ final class Findings {
 
         boolean isDoubtful(Set<Rule> rules) {
             return today.isDoubtful(rules) || atDesign.isPresent() && atDesign.get().isDoubtful(rules);
-        }
-
-        void judge(Set<Rule> rules, MonteCarlo drawn) {
-            today.judge(rules, drawn.chances());
-            atDesign.ifPresent(design -> design.judge(rules, drawn.chancesAtDesign()));
         }
 
         /** What was refused at either feed, each once. */
@@ -146,12 +146,20 @@ final class Findings {
         return judged.values().stream().anyMatch(Finding::drawn);
     }
 
-    /** Judges some rules by what came of drawing their readings. */
-    private void judge(Set<Rule> rules, Map<Rule, Chance> chances) {
-        for (Rule rule : rules) {
-            if (judged.containsKey(rule) && chances.containsKey(rule)) {
-                judged.put(rule, Judgement.drawn(judged.get(rule), chances.get(rule), settings.certainty()));
+    /** Judges the rules on the depth by what came of drawing their readings. */
+    void draw(DrawnBed bed) {
+        for (Rule rule : OF_DEPTHS) {
+            if (judged.containsKey(rule)) {
+                draw(rule, bed.observed(rule));
             }
+        }
+    }
+
+    /** Judges a rule by what it observes in every trial. */
+    void draw(Rule rule, double[] observed) {
+        Finding finding = judged.get(rule);
+        if (finding != null) {
+            judged.put(rule, Judgement.drawn(finding, Chance.of(finding, observed), settings.certainty()));
         }
     }
 

@@ -60,7 +60,9 @@ final class Observations {
 
     /**
      * Why a rule that was read for cannot be judged: the code of an assumption. The belt of a feeder bears its hopper,
-     * of which no reading tells; a conveyor that is skirted all along has no open belt to carry the flow.
+     * of which no reading tells; a conveyor that is skirted all along has no open belt to carry the flow. A feeder that
+     * is not skirted all along lays its flow on an open belt like any other, hopper or not, so that the rule on that
+     * flow holds for it; where it is, the mark for that says so.
      */
     Optional<String> outsideTheMethods(Rule rule) {
         if (rule == Rule.FLOW_OVER_CAPACITY && zone.zone().is(LoadingZone.Mark.FULLY_SKIRTED)
@@ -85,12 +87,22 @@ final class Observations {
             return new Limit(Findings.times(limit.near(), speed), Findings.times(limit.overloaded(), speed), limit.on(),
                     limit.source(), limit.assumption());
         }
+        return rule == Rule.SKIRTS_OVER_BUDGET ? budgeted(limit) : limit;
+    }
+
+    /**
+     * The register's budget is the limit of overload. The warning stays where it is, since it is about what skirts take
+     * as a rule; only one beyond the budget, which would never be heard, is drawn in to it.
+     */
+    private Limit budgeted(Limit limit) {
         Deduced<Uncertain> budget = zone.number(Datum.SKIRT_POWER_BUDGET);
-        if (rule == Rule.SKIRTS_OVER_BUDGET && budget.isKnown()) {
-            return new Limit(limit.near(), OptionalDouble.of(budget.get().value()), limit.on(), limit.source(),
-                    limit.assumption());
+        if (!budget.isKnown()) {
+            return limit;
         }
-        return limit;
+        double most = budget.get().value();
+        OptionalDouble near = limit.near().isEmpty() ? limit.near()
+                : OptionalDouble.of(Math.min(limit.near().getAsDouble(), most));
+        return new Limit(near, OptionalDouble.of(most), limit.on(), limit.source(), limit.assumption());
     }
 
     private Deduced<Uncertain> boardOverLumps() {

@@ -1,5 +1,6 @@
 package bedmark.engine;
 
+import bedmark.engine.bed.Profile;
 import bedmark.engine.seal.SealCondition;
 import bedmark.engine.seal.SealSegment;
 import bedmark.engine.uncertainty.Uncertain;
@@ -83,12 +84,19 @@ final class Remedies {
         return remedies;
     }
 
-    /** A bed that lags is brought to belt speed: its area falls with the ratio of the two. */
+    /**
+     * A bed that lags is brought to belt speed, all along the zone: the same flow at one speed has one area, and with
+     * it one depth, whatever its shape was while it lagged. The mean area falls with the ratio of the two speeds.
+     */
     private Optional<Remedy> freeBed() {
         if (!breaches.contains(Rule.BED_BEHIND_BELT) || now.bedSpeedRatio().get().value() == 0) {
             return Optional.empty();
         }
-        FeedFacts then = new FeedFacts(zone, FeedFacts.scaled(zone, now.bedSpeedRatio().get()), now.statedFlow());
+        Deduced<Profile> level = FeedFacts.scaled(zone, now.bedSpeedRatio().get()).map(bed -> {
+            Uncertain mean = bed.meanLevel();
+            return bed.map(lagging -> mean);
+        });
+        FeedFacts then = new FeedFacts(zone, level, now.statedFlow());
         return Optional.of(remedy("free-bed", OptionalDouble.of(1), "1", then, 1, true, BED));
     }
 

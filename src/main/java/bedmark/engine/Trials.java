@@ -11,28 +11,20 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Random;
-import java.util.Set;
 
 /** Draws the readings of the zones of one conveyor many times, and computes each drawing by the one set of formulas. */
 final class Trials {
     private static final double HALF_OF_RECTANGLE = Math.sqrt(3);
+    private static final Rule[] RULES = Rule.values();
 
     private final Settings settings;
     private final int number;
-    private final Set<Rule> rules;
-    private final boolean withResults;
     private final List<Drawn> zones = new ArrayList<>();
 
-    /**
-     * @param number      of trials, at least one
-     * @param rules       those to watch
-     * @param withResults whether the numbers are watched too
-     */
-    Trials(List<LoadingZone> surveyed, Settings settings, int number, Set<Rule> rules, boolean withResults) {
+    /** @param number of trials, at least one */
+    Trials(List<LoadingZone> surveyed, Settings settings, int number) {
         this.settings = settings;
         this.number = number;
-        this.rules = rules;
-        this.withResults = withResults;
         surveyed.forEach(zone -> zones.add(new Drawn(zone)));
     }
 
@@ -85,10 +77,8 @@ final class Trials {
             ZoneFacts zone = new ZoneFacts(Sources.drawn(surveyed, settings, draw));
             FeedFacts feed = FeedFacts.today(zone);
             Deduced<FeedFacts> design = FeedFacts.atDesign(zone);
-            if (withResults) {
-                Results.of(feed).forEach((result, value) -> note(results, result, trial, value));
-                feed.methods().forEach((method, value) -> note(methods, method, trial, value));
-            }
+            Results.of(feed).forEach((result, value) -> note(results, result, trial, value));
+            feed.methods().forEach((method, value) -> note(methods, method, trial, value));
             observe(trial, today, new Observations(feed, feed), 0);
             if (design.isKnown()) {
                 observe(trial, atDesign, new Observations(feed, design.get()),
@@ -99,7 +89,7 @@ final class Trials {
         }
 
         private void observe(int trial, Map<Rule, double[]> noted, Observations observations, double driveApart) {
-            for (Rule rule : rules) {
+            for (Rule rule : RULES) {
                 if (rule != Rule.SKIRTS_OVER_BUDGET) {
                     note(noted, rule, trial, observations.of(rule));
                 }
@@ -111,7 +101,7 @@ final class Trials {
 
         /** Notes what all the zones take together. */
         void conveyor(int trial, Shares sum) {
-            if (rules.contains(Rule.SKIRTS_OVER_BUDGET) && asRead.of(Rule.SKIRTS_OVER_BUDGET).isKnown()) {
+            if (asRead.of(Rule.SKIRTS_OVER_BUDGET).isKnown()) {
                 note(today, Rule.SKIRTS_OVER_BUDGET, trial, sum.today());
                 note(atDesign, Rule.SKIRTS_OVER_BUDGET, trial, sum.atDesign());
             }

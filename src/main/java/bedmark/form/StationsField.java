@@ -50,6 +50,7 @@ public record StationsField(Head head, List<Choice> methods, Measure position, M
         answer(survey).filter(answer -> !(answer instanceof Node.Series)).ifPresent(answer ->
                 judgements.add(Judgement.refusal(where(), "answer-of-wrong-kind")));
         Optional<Quantity> length = length(survey.at(ZONE_LENGTH));
+        PastBed past = new PastBed(last);
         List<Quantity> seen = new ArrayList<>();
         List<Node> stations = stations(survey);
         for (int i = 0; i < stations.size(); i++) {
@@ -65,7 +66,8 @@ public record StationsField(Head head, List<Choice> methods, Measure position, M
             place.ifPresent(at -> judgements.addAll(judgePlace(where.child("position"), at, length, seen)));
             place.ifPresent(seen::add);
             station.get("depth").map(answer -> depth.judge(where.child("depth"), answer,
-                    place.flatMap(at -> depthAt(at, last)))).ifPresent(judgements::addAll);
+                    place.flatMap(at -> past.depthAt(at, PastBed.method(station, survey)))))
+                    .ifPresent(judgements::addAll);
         }
         return judgements;
     }
@@ -84,13 +86,6 @@ public record StationsField(Head head, List<Choice> methods, Measure position, M
         return length.filter(end -> Quantity.BY_SIZE.compare(place, end) > 0)
                 .map(end -> List.of(Judgement.refusal(where, "station-outside-zone", show(place), show(end))))
                 .orElse(List.of());
-    }
-
-    private Optional<Node> depthAt(Quantity place, Branch last) {
-        return stations(last).stream().filter(Branch.class::isInstance).map(Branch.class::cast)
-                .filter(station -> length(station.get("position"))
-                        .filter(at -> Quantity.BY_SIZE.compare(at, place) == 0).isPresent())
-                .findFirst().flatMap(station -> station.get("depth"));
     }
 
     private List<Node> stations(Branch survey) {

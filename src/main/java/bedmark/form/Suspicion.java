@@ -5,8 +5,8 @@ import java.math.MathContext;
 
 /** Tells a slipped decimal sign from a reading that really changed. */
 final class Suspicion {
-    /** A tenfold slip of a reading that itself changed by a fifth since. */
-    private static final BigDecimal SLIP = BigDecimal.valueOf(8);
+    /** A tenfold slip of a reading that was itself halved or doubled since. */
+    private static final BigDecimal SLIP = BigDecimal.valueOf(5);
 
     private Suspicion() {
     }

@@ -16,6 +16,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Properties;
 import org.h2.Driver;
 import org.h2.api.ErrorCode;
@@ -31,6 +32,7 @@ final class Database implements AutoCloseable {
     private static final String FILE = "jdbc:h2:file:";
     private static final String MEMORY = "jdbc:h2:mem:";
     private static final String SETTINGS = ";WRITE_DELAY=0;DB_CLOSE_ON_EXIT=FALSE;TRACE_LEVEL_FILE=0";
+    private static final String ENCRYPTED = ";CIPHER=AES";
     private static final String READ_ONLY = ";ACCESS_MODE_DATA=r;IFEXISTS=TRUE";
     private static final String SCHEMA = "schema.sql";
 
@@ -50,20 +52,32 @@ final class Database implements AutoCloseable {
     /**
      * Opens the database of a folder, and makes an empty one where there is none.
      *
+     * @param password of the file's own encryption; a file with another one, or with none, is broken
      * @throws Refused {@code store-locked} where another program has it open
      */
+    static Database open(Path folder, Optional<String> password) {
+        return connect(FILE + path(folder) + SETTINGS + (password.isPresent() ? ENCRYPTED : ""), folder, password);
+    }
+
+    /** The same without a password. */
     static Database open(Path folder) {
-        return connect(FILE + path(folder) + SETTINGS, folder);
+        return open(folder, Optional.empty());
     }
 
     /** Opens the database of a folder without writing a byte. */
+    static Database openToRead(Path folder, Optional<String> password) {
+        return connect(FILE + path(folder) + SETTINGS + READ_ONLY + (password.isPresent() ? ENCRYPTED : ""), folder,
+                password);
+    }
+
+    /** The same without a password. */
     static Database openToRead(Path folder) {
-        return connect(FILE + path(folder) + SETTINGS + READ_ONLY, folder);
+        return openToRead(folder, Optional.empty());
     }
 
     /** An empty database that ends with the program, for when the disk takes none. */
     static Database inMemory() {
-        return connect(MEMORY + SETTINGS, Path.of(""));
+        return connect(MEMORY + SETTINGS, Path.of(""), Optional.empty());
     }
 
     /**
@@ -83,10 +97,11 @@ final class Database implements AutoCloseable {
         return path;
     }
 
-    private static Database connect(String url, Path folder) {
+    private static Database connect(String url, Path folder, Optional<String> password) {
         Properties person = new Properties();
         person.setProperty("user", "");
-        person.setProperty("password", "");
+        // The file's password and the person's, who has none.
+        person.setProperty("password", password.map(word -> word + " ").orElse(""));
         try {
             Connection connection = new Driver().connect(url, person);
             connection.setAutoCommit(false);

@@ -30,7 +30,7 @@ public final class Desk implements AutoCloseable {
     }
 
     /** Takes work that nobody waits for; it is done before all that is taken later. */
-    void begin(Runnable work) {
+    public void begin(Runnable work) {
         try {
             thread.execute(work);
         } catch (RejectedExecutionException e) {

@@ -22,19 +22,19 @@ final class Histories {
     }
 
     private final Map<UUID, Folded> known = new LinkedHashMap<>(16, 0.75f, true);
-    private final Function<UUID, List<Placed>> entries;
+    private final Function<UUID, Folded> stored;
 
     /**
-     * @param entries reads all entries of a survey, in order
+     * @param stored folds all entries of a survey, as they are stored
      */
-    Histories(Function<UUID, List<Placed>> entries) {
-        this.entries = entries;
+    Histories(Function<UUID, Folded> stored) {
+        this.stored = stored;
     }
 
     Folded of(UUID survey) {
         Folded folded = known.get(survey);
         if (folded == null) {
-            folded = fold(survey, entries.apply(survey), new ArrayList<>());
+            folded = stored.apply(survey);
             known.put(survey, folded);
         }
         return folded;

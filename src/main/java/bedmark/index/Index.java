@@ -10,6 +10,7 @@ import bedmark.survey.Entry;
 import bedmark.survey.SurveyHistory;
 import java.sql.ResultSet;
 import java.sql.SQLException;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -19,7 +20,7 @@ import java.util.UUID;
 
 /** Takes entries into the database, one by one or many at once, in the order of the journal. */
 final class Index implements AutoCloseable {
-    static final String FORMAT = "1";
+    static final String FORMAT = "3";
     static final String UNREAD = "?";
     private static final int BATCH = 1000;
     private static final String ENTRY = "insert into entry values (?, ?, ?, ?, ?, ?, ?, ?, ?)";
@@ -30,23 +31,23 @@ final class Index implements AutoCloseable {
     private final Database database;
     private final LevelOf levels;
     private final EntrySource source;
-    private final Histories histories = new Histories(this::entriesOf);
+    private final Histories histories = new Histories(this::load);
     private final Set<UUID> changed = new LinkedHashSet<>();
     private Optional<Branch> register = Optional.empty();
     private boolean registerRead;
     private Optional<Mark> newest;
     private UUID journal;
-    private long entries;
+    private Tally tally;
     private int waiting;
 
     private Index(Database database, LevelOf levels, EntrySource source, UUID journal, Optional<Mark> newest,
-                  long entries) {
+                  Tally tally) {
         this.database = database;
         this.levels = levels;
         this.source = source;
         this.journal = journal;
         this.newest = newest;
-        this.entries = entries;
+        this.tally = tally;
     }
 
     /** An empty index for a journal, in an empty database. */
@@ -55,7 +56,7 @@ final class Index implements AutoCloseable {
         database.run("insert into settings values ('format', ?)", FORMAT);
         database.run("insert into settings values ('journal', ?)", journal.toString());
         database.commit();
-        return new Index(database, levels, source, journal, Optional.empty(), 0);
+        return new Index(database, levels, source, journal, Optional.empty(), Tally.NOTHING);
     }
 
     /**
@@ -68,31 +69,31 @@ final class Index implements AutoCloseable {
             throw new IndexBroken("the index is of another format");
         }
         UUID journal = uuid(setting(database, "journal"));
-        List<Marked> marks = database.rows("select sequence_no, segment, start_at, byte_length, hash, entries, seal "
-                + "from mark e", row -> marked(row, journal));
+        List<Marked> marks = database.rows("select sequence_no, segment, start_at, byte_length, hash, entries, "
+                + "landmarks, seal from mark e", row -> marked(row, journal));
         long counted = database.rows("select count(*) from entry", row -> row.getLong(1)).get(0);
-        long expected = marks.isEmpty() ? 0 : marks.get(0).entries();
-        if (counted != expected) {
-            throw new IndexBroken("the index holds " + counted + " entries instead of " + expected);
+        Tally tally = marks.isEmpty() ? Tally.NOTHING : marks.get(0).tally();
+        if (counted != tally.entries()) {
+            throw new IndexBroken("the index holds " + counted + " entries instead of " + tally.entries());
         }
-        return new Index(database, levels, source, journal, marks.stream().map(Marked::mark).findFirst(), expected);
+        return new Index(database, levels, source, journal, marks.stream().map(Marked::mark).findFirst(), tally);
     }
 
-    private record Marked(Mark mark, long entries) {
+    private record Marked(Mark mark, Tally tally) {
     }
 
     private static Marked marked(ResultSet row, UUID journal) throws SQLException {
         At at = at(row);
         Mark mark = new Mark(journal, at.sequence(), at.place());
-        long entries = row.getLong("entries");
-        if (!Arrays.equals(seal(mark, entries), row.getBytes("seal"))) {
+        Tally tally = Tally.read(row.getLong("entries"), row.getString("landmarks"));
+        if (!Arrays.equals(seal(mark, tally), row.getBytes("seal"))) {
             throw new IndexBroken("the mark is not as it was written");
         }
-        return new Marked(mark, entries);
+        return new Marked(mark, tally);
     }
 
-    private static byte[] seal(Mark mark, long entries) {
-        return RowSeal.of(mark.journal(), mark.sequence(), mark.place(), entries);
+    private static byte[] seal(Mark mark, Tally tally) {
+        return RowSeal.of(mark.journal(), mark.sequence(), mark.place(), tally);
     }
 
     private static String setting(Database database, String name) {
@@ -149,7 +150,7 @@ final class Index implements AutoCloseable {
         database.batch(ENTRY, sequence, place.segment(), place.offset(), place.length(), place.hash().bytes(), act,
                 at, person, survey);
         newest = Optional.of(new Mark(journal, sequence, place));
-        entries++;
+        tally = tally.withEntry();
     }
 
     private void special(Entry entry) {
@@ -158,14 +159,25 @@ final class Index implements AutoCloseable {
             pushSurveys();
             register = Optional.of(taken.register());
             registerRead = true;
-            database.batch(LANDMARK, act.code(), entry.sequence());
-        } else if (act instanceof Act.PackExported) {
-            database.batch(LANDMARK, act.code(), entry.sequence());
+            landmark(entry);
+        } else if (isLandmark(act)) {
+            landmark(entry);
         } else if (act instanceof Act.WalkStarted started) {
             database.run("merge into walk key (round) values (?, ?, null)", started.round(), entry.sequence());
         } else if (act instanceof Act.WalkFinished finished) {
             database.run("update walk set finished = ? where round = ?", entry.sequence(), finished.round());
         }
+    }
+
+    private void landmark(Entry entry) {
+        database.batch(LANDMARK, entry.act().code(), entry.sequence());
+        tally = tally.withLandmark(entry);
+    }
+
+    /** Whether entries of that kind are looked for by what they are. */
+    static boolean isLandmark(Act act) {
+        return act instanceof Act.RegisterTaken || act instanceof Act.PackExported || act instanceof Act.ReceiptNoted
+                || act instanceof Act.BackupMade || act instanceof Act.PointProposed;
     }
 
     /** Makes everything that was taken in last. */
@@ -177,8 +189,9 @@ final class Index implements AutoCloseable {
         pushSurveys();
         Mark mark = newest.orElseThrow();
         Place place = mark.place();
-        database.run("merge into mark key (one) values (1, ?, ?, ?, ?, ?, ?, ?)", mark.sequence(), place.segment(),
-                place.offset(), place.length(), place.hash().bytes(), entries, seal(mark, entries));
+        database.run("merge into mark key (one) values (1, ?, ?, ?, ?, ?, ?, ?, ?)", mark.sequence(),
+                place.segment(), place.offset(), place.length(), place.hash().bytes(), tally.entries(), tally.text(),
+                seal(mark, tally));
         database.commit();
         waiting = 0;
         if (histories.full()) {
@@ -214,6 +227,17 @@ final class Index implements AutoCloseable {
         }
     }
 
+    /** Folds a survey that is not at hand; its row tells whether all its entries were found. */
+    private Folded load(UUID survey) {
+        Folded folded = Histories.fold(survey, entriesOf(survey), new ArrayList<>());
+        List<Folded> rows = database.rows("select first_no, last_no, hash from survey where id = ?", row ->
+                new Folded(folded.history(), row.getLong(1), row.getLong(2), Digest.ofBytes(row.getBytes(3))), survey);
+        if (rows.size() != folded.history().stream().count() || !rows.isEmpty() && !rows.get(0).equals(folded)) {
+            throw new IndexBroken("the index does not find every entry of survey " + survey);
+        }
+        return folded;
+    }
+
     /** A survey as it stands. */
     Folded folded(UUID survey) {
         return histories.of(survey);
@@ -230,11 +254,19 @@ final class Index implements AutoCloseable {
         return register;
     }
 
-    /** The newest entries of one kind, newest first. */
+    /** The newest entries of one kind, newest first; neither too few nor any other. */
     List<Entry> landmarks(String act, int atMost) {
-        return database.rows("select " + PLACES + " from landmark l join entry e on e.sequence_no = l.sequence_no "
-                + "where l.act = ? order by l.sequence_no desc limit ?", Index::at, act, atMost).stream()
-                .map(this::read).map(Histories.Placed::entry).toList();
+        List<Entry> found = database.rows("select " + PLACES + " from landmark l join entry e "
+                + "on e.sequence_no = l.sequence_no where l.act = ? order by l.sequence_no desc limit ?", Index::at, act,
+                atMost).stream().map(this::read).map(Histories.Placed::entry).toList();
+        Tally.Kind expected = tally.kind(act);
+        boolean whole = found.size() == Math.min(atMost, expected.count())
+                && found.stream().allMatch(entry -> entry.act().code().equals(act))
+                && (found.isEmpty() || found.get(0).sequence() == expected.last());
+        if (!whole) {
+            throw new IndexBroken("the index does not find every " + act);
+        }
+        return found;
     }
 
     /** One entry, proved against the journal. */

@@ -72,7 +72,7 @@ final class IndexProof {
             return entry.map(read -> {
                 Act act = read.act();
                 long touched = act.about().isPresent() ? 0 : Fold.touched(act).size();
-                boolean marked = act instanceof Act.RegisterTaken || act instanceof Act.PackExported;
+                boolean marked = Index.isLandmark(act);
                 return new Row(at, act.code(), read.at().toString(), read.person(), act.about(), touched,
                         marked ? 1 : 0);
             }).orElse(new Row(at, Index.UNREAD, "", "", Optional.empty(), 0, 0));
@@ -83,6 +83,7 @@ final class IndexProof {
     private final Deque<Row> ahead = new ArrayDeque<>();
     private final Set<UUID> opened = new HashSet<>();
     private final Map<String, List<Long>> walks = new HashMap<>();
+    private final Map<String, List<Long>> landmarks = new HashMap<>();
     private final List<Defect> defects = new ArrayList<>();
     private boolean comparing;
     private long known;
@@ -120,6 +121,9 @@ final class IndexProof {
     }
 
     private void remember(Entry entry) {
+        if (Index.isLandmark(entry.act())) {
+            landmarks.computeIfAbsent(entry.act().code(), unknown -> new ArrayList<>()).add(entry.sequence());
+        }
         if (Fold.opens(entry.act())) {
             opened.addAll(Fold.touched(entry.act()));
         } else {
@@ -148,19 +152,32 @@ final class IndexProof {
             }
             surveys();
             walks();
+            landmarks();
         });
         return comparing && defects.stream().noneMatch(defect -> defect.code().startsWith("index-"));
     }
 
     private void surveys() {
         Set<UUID> expected = new HashSet<>(opened);
+        IndexPaths paths = new IndexPaths();
         for (List<Opened> page = page(0); !page.isEmpty(); page = page(page.get(page.size() - 1).first())) {
             for (Opened row : page) {
                 asker.ask(index -> survey(index, row.survey()));
+                asker.ask(index -> new Queries(index).row(row.survey())).ifPresent(found -> paths.add(found.line()));
                 expected.remove(row.survey());
             }
         }
         expected.forEach(survey -> differs("survey", survey.toString()));
+        paths.wrong(asker).forEach(path -> differs("survey", path));
+    }
+
+    /** Looks for the entries that people look for by their kind the way that they are looked for. */
+    private void landmarks() {
+        landmarks.forEach((act, sequences) -> asker.ask(index -> {
+            List<Long> found = index.landmarks(act, Integer.MAX_VALUE).stream().map(Entry::sequence)
+                    .filter(sequence -> sequence <= known).sorted().toList();
+            return found.equals(sequences) || differs("landmark", act);
+        }));
     }
 
     private record Opened(UUID survey, long first) {
@@ -202,8 +219,8 @@ final class IndexProof {
         defects.add(Defect.in(Ledger.JOURNAL, "entry-unfit", Long.toString(sequence), survey.toString()));
     }
 
-    private void differs(String table, String key) {
-        defects.add(Defect.in(Ledger.INDEX, "index-differs", table, key));
+    private boolean differs(String table, String key) {
+        return defects.add(Defect.in(Ledger.INDEX, "index-differs", table, key));
     }
 
     private void guarded(Runnable step) {

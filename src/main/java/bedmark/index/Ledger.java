@@ -3,6 +3,7 @@ package bedmark.index;
 import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Cover;
 import bedmark.journal.EntryReader;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
@@ -14,6 +15,7 @@ import bedmark.journal.Place;
 import bedmark.journal.Replay;
 import bedmark.json.EntryCodec;
 import bedmark.survey.Entry;
+import bedmark.vault.DataKey;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -30,6 +32,7 @@ final class Ledger implements AutoCloseable {
 
     private final StoreOptions options;
     private final FileLayer files;
+    private final Optional<DataKey> key;
     private final Path journalFolder;
     private final Path indexFolder;
     private final EntryReader reader;
@@ -40,21 +43,23 @@ final class Ledger implements AutoCloseable {
     private boolean rebuilt;
     private long replayed;
 
-    private Ledger(Path folder, StoreOptions options) {
+    private Ledger(Path folder, StoreOptions options, Optional<DataKey> key) {
         this.options = options;
+        this.key = key;
         this.files = options.files();
         this.journalFolder = folder.resolve(JOURNAL);
         this.indexFolder = folder.resolve(INDEX);
-        this.reader = new EntryReader(journalFolder, files);
+        this.reader = new EntryReader(journalFolder, files, Cover.of(key));
     }
 
     /**
      * Opens both.
      *
+     * @param key    what both are sealed with
      * @param afresh makes the index anew in any case
      */
-    static Ledger open(Path folder, StoreOptions options, boolean afresh) throws IOException {
-        Ledger ledger = new Ledger(folder, options);
+    static Ledger open(Path folder, StoreOptions options, Optional<DataKey> key, boolean afresh) throws IOException {
+        Ledger ledger = new Ledger(folder, options, key);
         try {
             ledger.open(afresh);
             return ledger;
@@ -70,8 +75,8 @@ final class Ledger implements AutoCloseable {
             openIndex();
         }
         Optional<Mark> mark = index.flatMap(Index::mark);
-        Journal opened = Journal.open(journalFolder, files, options.segmentBytes(), mark, options.progress(),
-                new CatchUp());
+        Journal opened = Journal.open(journalFolder, files, options.segmentBytes(), Cover.of(key), mark,
+                options.progress(), new CatchUp());
         journal = Optional.of(opened);
         found.addAll(opened.found());
         rebuilt |= begunAnew && replayed > 0;
@@ -81,12 +86,17 @@ final class Ledger implements AutoCloseable {
         ask(Index::mark);
     }
 
+    private Optional<String> password() {
+        return key.map(DataKey::indexPassword);
+    }
+
     private void openIndex() {
         Optional<Database> database = Optional.empty();
         try {
-            database = Optional.of(Database.open(indexFolder));
+            database = Optional.of(Database.open(indexFolder, password()));
             index = Optional.of(Index.goOn(database.get(), options.levels(), reader::read));
-        } catch (IndexBroken e) {
+        } catch (IndexBroken | Refused e) {
+            // Nobody else has this store: a database that says it is in use was left so by a damaged file.
             database.ifPresent(Ledger::closeQuietly);
         }
     }
@@ -115,9 +125,9 @@ final class Ledger implements AutoCloseable {
             for (Path file : files.list(indexFolder)) {
                 files.delete(file);
             }
-            database = Optional.of(Database.open(indexFolder));
+            database = Optional.of(Database.open(indexFolder, password()));
             index = Optional.of(Index.begin(database.get(), options.levels(), reader::read, identity));
-        } catch (IOException | IndexBroken e) {
+        } catch (IOException | IndexBroken | Refused e) {
             database.ifPresent(Ledger::closeQuietly);
             inMemory(identity);
         }
@@ -205,7 +215,7 @@ final class Ledger implements AutoCloseable {
         replayed = 0;
         beginning.accept(journal().identity());
         try {
-            JournalProof.of(journalFolder, files, Optional.of(journal().extent()), new JournalVisitor() {
+            JournalProof.of(journalFolder, files, Cover.of(key), Optional.of(journal().extent()), new JournalVisitor() {
                 @Override
                 public void entry(long sequence, Place place, byte[] payload) {
                     take(sequence, place, payload);
@@ -270,6 +280,10 @@ final class Ledger implements AutoCloseable {
 
     long last() {
         return journal().last();
+    }
+
+    Journal.Reach reach() {
+        return journal().reach();
     }
 
     Journal.Extent extent() {

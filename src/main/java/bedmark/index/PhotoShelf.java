@@ -6,11 +6,12 @@ import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.journal.Digest;
 import bedmark.journal.FileLayer;
+import bedmark.vault.DataKey;
+import bedmark.vault.SealedInput;
 import java.io.FileInputStream;
 import java.io.FileNotFoundException;
 import java.io.IOException;
 import java.io.InputStream;
-import java.nio.ByteBuffer;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.util.Arrays;
@@ -18,9 +19,16 @@ import java.util.Optional;
 import java.util.UUID;
 import java.util.regex.Pattern;
 
-/** The folder {@code photos/}: each file untouched, under its own digest, and only ever there as a whole. */
+/**
+ * The folder {@code photos/}: each file untouched, under its own digest, and only ever there as a whole. Where the store
+ * has a key, each is sealed with it and bears a further ending; the digest is that of the photo itself.
+ */
 final class PhotoShelf {
     static final String FOLDER = "photos";
+    /** What is not yet a photo lies apart, so that opening need not look through the photos of many years. */
+    static final String INCOMING = "incoming";
+    /** What the names of sealed files end with. */
+    static final String SEALED = ".sealed";
     private static final Pattern FILE = Pattern.compile("photos/[0-9a-f]{64}\\.(jpg|png)");
     private static final String PART = ".part";
     private static final int CHUNK = 256 << 10;
@@ -29,31 +37,55 @@ final class PhotoShelf {
 
     private final Path store;
     private final Path folder;
+    private final Path incoming;
     private final FileLayer files;
+    private final Optional<DataKey> key;
 
-    PhotoShelf(Path store, FileLayer files) {
+    PhotoShelf(Path store, FileLayer files, Optional<DataKey> key) {
         this.store = store;
         this.folder = store.resolve(FOLDER);
+        this.incoming = store.resolve(INCOMING);
         this.files = files;
+        this.key = key;
     }
 
     Path folder() {
         return folder;
     }
 
-    /** Makes the folder and drops what never came to be a photo. */
+    /** Makes the folders and drops what never came to be a photo. */
     void open() throws IOException {
         files.createFolder(folder);
-        for (Path file : files.list(folder)) {
-            if (file.getFileName().toString().endsWith(PART)) {
-                files.delete(file);
-            }
+        files.createFolder(incoming);
+        for (Path file : files.list(incoming)) {
+            files.delete(file);
         }
     }
 
     /** Where the file of a photo lies; nothing where its document names none of this shelf. */
     Optional<Path> file(Branch photo) {
-        return photo.text("file").filter(name -> FILE.matcher(name).matches()).map(store::resolve);
+        return photo.text("file").filter(name -> FILE.matcher(name).matches()).map(this::onDisk);
+    }
+
+    /** Whether a photo's document names a file of a shelf at all; a survey from elsewhere may name others. */
+    static boolean isShelved(Branch photo) {
+        return photo.text("file").filter(name -> FILE.matcher(name).matches()).isPresent();
+    }
+
+    private Path onDisk(String name) {
+        return store.resolve(key.isPresent() ? name + SEALED : name);
+    }
+
+    /** The photo in a file of this shelf, whether it is sealed or not. */
+    InputStream read(Path file) throws IOException {
+        return Sealed.read(files, file, key);
+    }
+
+    /** The size of the photo in a file of this shelf (bytes); negative where the file is damaged. */
+    long size(Path file) throws IOException {
+        try (FileLayer.Input input = files.read(file)) {
+            return key.isPresent() ? SealedInput.plainLength(input.size()) : input.size();
+        }
     }
 
     /**
@@ -83,7 +115,7 @@ final class PhotoShelf {
         byte[] chunk = new byte[CHUNK];
         int count = read(source, chunk);
         String ending = ending(chunk, count).orElseThrow(() -> new Refused(Defect.in(name, "photo-unfit")));
-        Path part = folder.resolve(UUID.randomUUID() + PART);
+        Path part = incoming.resolve(UUID.randomUUID() + PART);
         try {
             return place(part, ending, copy(source, chunk, count, part));
         } catch (IOException e) {
@@ -99,26 +131,27 @@ final class PhotoShelf {
     private Copied copy(InputStream source, byte[] chunk, int first, Path part) throws IOException {
         MessageDigest sha = Digest.sha256();
         long bytes = 0;
-        try (FileLayer.Output output = files.create(part)) {
+        try (Sealed.Writing writing = Sealed.write(files, part, key)) {
             for (int count = first; count > 0; count = read(source, chunk)) {
                 sha.update(chunk, 0, count);
-                output.write(ByteBuffer.wrap(chunk, 0, count));
+                writing.write(chunk, count);
                 bytes += count;
             }
-            output.force();
+            writing.finish();
         }
         return new Copied(Digest.ofBytes(sha.digest()), bytes);
     }
 
     private Branch place(Path part, String ending, Copied copied) throws IOException {
-        Path file = folder.resolve(copied.digest().hex() + ending);
-        if (files.exists(file) && digestOf(file).equals(copied.digest())) {
+        String name = FOLDER + "/" + copied.digest().hex() + ending;
+        Path file = onDisk(name);
+        if (files.exists(file) && digestOf(file).equals(Optional.of(copied.digest()))) {
             files.delete(part);
         } else {
             files.move(part, file);
         }
         files.forceFolder(folder);
-        return Branch.EMPTY.with("file", FOLDER + "/" + file.getFileName()).with("sha256", copied.digest().hex())
+        return Branch.EMPTY.with("file", name).with("sha256", copied.digest().hex())
                 .with("bytes", Node.number(copied.bytes()));
     }
 
@@ -130,18 +163,9 @@ final class PhotoShelf {
         }
     }
 
-    Digest digestOf(Path file) throws IOException {
-        MessageDigest sha = Digest.sha256();
-        try (FileLayer.Input input = files.read(file)) {
-            long at = 0;
-            for (int count = 1; count > 0;) {
-                ByteBuffer chunk = ByteBuffer.allocate(CHUNK);
-                count = input.read(at, chunk);
-                at += count;
-                sha.update(chunk.flip());
-            }
-        }
-        return Digest.ofBytes(sha.digest());
+    /** The digest of the photo in a file of this shelf; nothing where a sealed one is damaged. */
+    Optional<Digest> digestOf(Path file) throws IOException {
+        return Sealed.digest(files, file, key);
     }
 
     private static int read(InputStream source, byte[] chunk) throws SourceFailed {

@@ -1,5 +1,6 @@
 package bedmark.index;
 
+import bedmark.document.Branch;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.InspectionStatus;
@@ -7,6 +8,7 @@ import bedmark.survey.QueueState;
 import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -64,9 +66,9 @@ final class Queries {
         }
         return database.rows("select " + SurveyRow.COLUMNS + " from survey s where s.transfer = ? and s.state <> ? "
                 + "and s.inspection = ? and s.finished <= ? and not exists (select 1 from survey r "
-                + "where r.supersedes = s.id and r.state <> ?) order by s.finished desc, s.last_no desc",
+                + "where r.supersedes = s.id and r.state <> ?) order by s.finished desc, s.last_no desc limit ?",
                 SurveyRow::read, transfer, QueueState.OPEN.name(), InspectionStatus.INSPECTED.name(), bound,
-                QueueState.OPEN.name()).stream()
+                QueueState.OPEN.name(), without.size() + 1).stream()
                 .map(row -> row.line().id()).filter(id -> !without.contains(id)).findFirst();
     }
 
@@ -105,6 +107,19 @@ final class Queries {
             throw new IndexBroken("the walk of round " + steps.round() + " is not what the journal tells");
         }
         return new Walk(steps.round(), started.person(), started.at(), finished.map(Entry::at));
+    }
+
+    /** The proposals that stood as of an entry, in the order in which they were first made. */
+    List<Branch> proposals(long asOf) {
+        Map<UUID, Branch> standing = new LinkedHashMap<>();
+        List<Entry> made = index.landmarks("point-proposed", Integer.MAX_VALUE);
+        for (int i = made.size() - 1; i >= 0; i--) {
+            if (made.get(i).sequence() <= asOf) {
+                Act.PointProposed act = (Act.PointProposed) made.get(i).act();
+                standing.put(act.id(), act.proposal());
+            }
+        }
+        return standing.values().stream().filter(proposal -> !proposal.members().isEmpty()).toList();
     }
 
     List<Export> exports() {

@@ -6,17 +6,24 @@ import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
+import bedmark.journal.Journal;
 import bedmark.journal.NotSaved;
 import bedmark.journal.Progress;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.QueueState;
 import bedmark.survey.SurveyHistory;
+import bedmark.vault.DataKey;
+import bedmark.vault.Passphrase;
 import java.io.ByteArrayInputStream;
 import java.io.Closeable;
 import java.io.IOException;
+import java.io.InputStream;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
+import java.time.temporal.ChronoUnit;
+import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -28,23 +35,24 @@ import java.util.function.Consumer;
 import java.util.function.Function;
 
 /**
- * The store of one device, in one folder: {@code journal/} is the truth, {@code photos/} its files, {@code index/} a
- * database that can be thrown away, {@code device.json} the identity. One program at a time. All methods may be
- * called from any thread, interrupted or not; an act is saved on the caller's thread, all else waits for the
- * store's own.
+ * The store of one device, in one folder: {@code journal/} is the truth, {@code photos/} its files and
+ * {@code incoming/} those that are being copied, {@code index/} a database that can be thrown away,
+ * {@code device.json} the identity. One program at a time. All methods may be called from any thread, interrupted or
+ * not; an act is saved on the caller's thread, all else waits for the store's own.
  */
 public final class Store implements AutoCloseable {
-    private static final String LOCK = "store.lock";
+    static final String LOCK = "store.lock";
 
     private final Path folder;
     private final StoreOptions options;
+    private final Optional<DataKey> key;
     private final Closeable lock;
     private final Desk desk;
     private final Desk photoDesk = new Desk("bedmark-photos");
     private final PhotoShelf shelf;
     private final Ledger ledger;
     private final Pen pen;
-    private final Device device;
+    private volatile Device device;
     private final List<StoreObserver> observers = new CopyOnWriteArrayList<>();
     private final AtomicReference<Optional<OffsetDateTime>> savedAt;
     private final AtomicBoolean closed = new AtomicBoolean();
@@ -54,9 +62,10 @@ public final class Store implements AutoCloseable {
         this.options = options;
         this.lock = lock;
         this.desk = desk;
-        this.shelf = new PhotoShelf(folder, options.files());
+        this.key = Keys.of(folder, options.files(), options.passphrase());
+        this.shelf = new PhotoShelf(folder, options.files(), key);
         shelf.open();
-        this.ledger = Ledger.open(folder, options, afresh);
+        this.ledger = Ledger.open(folder, options, key, afresh);
         this.pen = new Pen(desk, ledger);
         try {
             Optional<Entry> newest = ledger.newest();
@@ -74,11 +83,21 @@ public final class Store implements AutoCloseable {
     /**
      * Opens a store, and makes it where the folder is empty or missing.
      *
-     * @throws Refused {@code store-locked} where another program has it open; {@code store-…} where the folder can't
-     *                 be used
+     * @throws Refused {@code store-locked} where another program has it open; {@code store-sealed} where it takes a
+     *                 passphrase and none is given, {@code passphrase-wrong}, {@code passphrase-…}; {@code store-…}
+     *                 where the folder can't be used
      */
     public static Store open(Path folder, StoreOptions options) {
         return open(folder, options, false);
+    }
+
+    /**
+     * Opens a store that is there.
+     *
+     * @throws Refused as {@link #open(Path, StoreOptions)}; {@code store-missing} where the folder holds no store
+     */
+    public static Store openExisting(Path folder, StoreOptions options) {
+        return open(requireStore(folder, options.files()), options);
     }
 
     private static Store open(Path folder, StoreOptions options, boolean afresh) {
@@ -100,6 +119,7 @@ public final class Store implements AutoCloseable {
             Closeable lock = files.lock(folder.resolve(LOCK))
                     .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
             try {
+                new Sealing(folder, files).settle();
                 return new Store(folder, options, lock, desk, afresh);
             } catch (IOException | RuntimeException e) {
                 lock.close();
@@ -113,15 +133,25 @@ public final class Store implements AutoCloseable {
     /**
      * Proves a store that need not be open, without changing a byte.
      *
-     * @throws Refused {@code store-missing} where the folder holds no store
+     * @param passphrase where the store is sealed
+     * @throws Refused {@code store-missing} where the folder holds no store, {@code sealing-unfinished},
+     *                 {@code store-sealed}, {@code passphrase-…}, {@code work-cancelled}
      */
-    public static StoreCheck check(Path folder, FileLayer files, Progress progress) {
+    public static StoreCheck check(Path folder, FileLayer files, Optional<Passphrase> passphrase, Progress progress) {
         Path home = requireStore(folder, files);
         Database.requireFit(home);
+        if (new Sealing(home, files).underWay()) {
+            throw new Refused(Defect.in(folder.toString(), "sealing-unfinished"));
+        }
         Desk desk = new Desk("bedmark-check");
         try (desk) {
-            return desk.call(() -> StoreProof.ofClosed(home, files, progress));
+            return desk.call(() -> StoreProof.ofClosed(home, files, Keys.look(home, files, passphrase), progress));
         }
+    }
+
+    /** As the other one, of a store that is not sealed. */
+    public static StoreCheck check(Path folder, FileLayer files, Progress progress) {
+        return check(folder, files, Optional.empty(), progress);
     }
 
     /**
@@ -137,7 +167,7 @@ public final class Store implements AutoCloseable {
         }
     }
 
-    private static Path requireStore(Path folder, FileLayer files) {
+    static Path requireStore(Path folder, FileLayer files) {
         Path home = folder.toAbsolutePath().normalize();
         if (!files.exists(home.resolve(Ledger.JOURNAL))) {
             throw new Refused(Defect.in(folder.toString(), "store-missing"));
@@ -151,6 +181,22 @@ public final class Store implements AutoCloseable {
 
     public Device device() {
         return device;
+    }
+
+    /**
+     * Gives the device another name; its identity stays.
+     *
+     * @throws NotSaved where the name is not on the medium; the old one then holds
+     */
+    public void nameDevice(String name) {
+        device = desk.call(() -> {
+            try {
+                return new DeviceFile(folder, options.files()).write(Optional.of(device.id()), name);
+            } catch (IOException e) {
+                throw new NotSaved(Fault.defect("not-saved", e, options.files(), folder,
+                        Long.toString(ledger.last())), ledger.last(), e);
+            }
+        });
     }
 
     /** What opening found and did, and what has been found since. */
@@ -256,14 +302,64 @@ public final class Store implements AutoCloseable {
         }
     }
 
+    /** As {@link #keepPhoto(Path)}, from a stream. */
+    Branch keepPhoto(InputStream content, String name) {
+        return keep(() -> shelf.keep(content, name));
+    }
+
     /**
-     * Where the file of a photo of a survey lies.
+     * Copies the whole store to a folder or stick, proves the copy, and notes that it was made. Others go on saving.
+     *
+     * @param chosen the backup gets a folder of its own in it; an earlier one there is brought up to date
+     * @return the backup's folder
+     * @throws Refused {@code backup-…}, {@code work-cancelled}: the store is as it was, and an earlier backup whole
+     */
+    public Path backup(Path chosen, String person, Progress progress) {
+        Path target = Backup.folder(chosen.toAbsolutePath().normalize(), device);
+        Journal.Reach now = desk.call(ledger::reach);
+        BackupList list = new Backup(folder, target, options.files(), progress).make(device,
+                OffsetDateTime.now(options.clock()).truncatedTo(ChronoUnit.SECONDS), now.extent(), now.last(),
+                sealed());
+        append(person, new Act.BackupMade(target.toString(), now.last(), list.sha256()));
+        return target;
+    }
+
+    /**
+     * Takes the surveys of another tablet's backup over; see {@link StoreFolder#restore}.
+     *
+     * @throws Refused {@code backup-…}, {@code restore-other-plant}, {@code store-sealed}, {@code passphrase-wrong},
+     *                 {@code photo-missing}, {@code work-cancelled}
+     */
+    public Restored takeOver(Path backup, Optional<Passphrase> passphrase, String person, Progress progress) {
+        FileLayer files = options.files();
+        try {
+            Path from = Backups.find(backup, files);
+            BackupList list = Backups.prove(from, files, progress);
+            return new HandOver(this, new BackupContent(from, list, files, passphrase), person).run();
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("restore", e, files, backup), e);
+        }
+    }
+
+    /**
+     * Where the file of a photo of a survey lies; in a sealed store that file is sealed, and only
+     * {@link #photo(Branch)} tells what it holds.
      *
      * @throws Refused {@code photo-missing} where the photo's document names no file of this store
      */
     public Path photoFile(Branch photo) {
         return shelf.file(photo).orElseThrow(() ->
                 new Refused(Defect.in(photo.text("file").orElse(""), "photo-missing")));
+    }
+
+    /** A photo of a survey; nothing where its document names none that lies in this store. */
+    public Optional<StoredPhoto> photo(Branch photo) {
+        return shelf.file(photo).filter(options.files()::exists).map(file -> new StoredPhoto(shelf, file));
+    }
+
+    /** Whether what lies on disk is sealed. */
+    public boolean sealed() {
+        return key.isPresent();
     }
 
     /** The latest register: {@code plant}, {@code forms}, {@code rounds}. */
@@ -274,6 +370,57 @@ public final class Store implements AutoCloseable {
     /** A survey as it stands, with every change, read from the journal. */
     public Optional<SurveyHistory> history(UUID survey) {
         return index(index -> index.folded(survey).history());
+    }
+
+    /**
+     * A survey as it stood when a certain entry had been saved; nothing where it was not opened yet.
+     *
+     * @param asOf sequence number of that entry
+     */
+    public Optional<SurveyHistory> history(UUID survey, long asOf) {
+        return index(index -> Histories.fold(survey, index.entriesOf(survey).stream()
+                .filter(placed -> placed.entry().sequence() <= asOf).toList(), new ArrayList<>()).history());
+    }
+
+    /** The register as it was when a certain entry had been saved. */
+    public Optional<Branch> register(long asOf) {
+        return index(index -> index.landmarks("register-taken", Integer.MAX_VALUE).stream()
+                .filter(entry -> entry.sequence() <= asOf).findFirst()
+                .map(entry -> ((Act.RegisterTaken) entry.act()).register()));
+    }
+
+    /**
+     * The entry since which some surveys have been ready to leave: the newest that completed or queued one of them. It
+     * stays the same however often they are exported.
+     */
+    public Optional<Entry> readySince(List<UUID> surveys) {
+        return index(index -> surveys.stream().flatMap(survey -> index.entriesOf(survey).stream())
+                .map(Histories.Placed::entry).filter(entry -> entry.act() instanceof Act.SurveyCompleted
+                        || entry.act() instanceof Act.SurveysQueued || entry.act() instanceof Act.SurveyTaken)
+                .max(Comparator.comparingLong(Entry::sequence)));
+    }
+
+    /** The receipts that were noted, newest first. */
+    public List<Branch> receipts() {
+        return index(index -> index.landmarks("receipt-noted", Integer.MAX_VALUE).stream()
+                .map(entry -> ((Act.ReceiptNoted) entry.act()).receipt()).toList());
+    }
+
+    /** How the store does. */
+    public StoreFacts facts() {
+        long last = desk.call(ledger::last);
+        Optional<StoreFacts.Made> backup = index(index -> index.landmarks("backup-made", 1).stream().findFirst())
+                .flatMap(StoreFacts.Made::of);
+        return new StoreFacts(last, savedAt(), backup, free(), sealed());
+    }
+
+    /** Some systems don't know. */
+    private long free() {
+        try {
+            return options.files().usableSpace(folder);
+        } catch (IOException e) {
+            return 0;
+        }
     }
 
     /** The surveys that a query asks for, in the order in which they were opened. */
@@ -326,6 +473,16 @@ public final class Store implements AutoCloseable {
         return ask(Queries::exports);
     }
 
+    /** The transfer points that were found in the field and proposed, in that order. */
+    public List<Branch> proposals() {
+        return proposals(Long.MAX_VALUE);
+    }
+
+    /** As {@link #proposals()}, as of an entry. */
+    public List<Branch> proposals(long asOf) {
+        return ask(queries -> queries.proposals(asOf));
+    }
+
     private <T> T ask(Function<Queries, T> question) {
         return index(index -> question.apply(new Queries(index)));
     }
@@ -347,7 +504,7 @@ public final class Store implements AutoCloseable {
 
     /** Proves the whole store in the calling thread, while others go on saving. */
     public StoreCheck check(Progress progress) {
-        return StoreProof.ofOpen(folder, options.files(), progress, desk, ledger);
+        return StoreProof.ofOpen(folder, options.files(), key, progress, desk, ledger);
     }
 
     /** Waits for what was begun, closes the index cleanly and gives the lock up. Closing again does nothing. */

@@ -15,9 +15,10 @@ import java.util.List;
  * @param indexEqual  whether the index says what the journal says
  * @param defects     everything found, each with its place: bad entries (segment, offset, sequence), photos that are
  *                    missing or differ, and where the index is not equal
+ * @param facts       what the entries and the volume tell beside
  */
 public record StoreCheck(int segments, long entries, long last, boolean chainIntact, List<String> torn, long photos,
-                         boolean indexEqual, List<Defect> defects) {
+                         boolean indexEqual, List<Defect> defects, StoreFacts facts) {
     public StoreCheck {
         torn = List.copyOf(torn);
         defects = List.copyOf(defects);

@@ -3,6 +3,7 @@ package bedmark.index;
 import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Cover;
 import bedmark.journal.EntryReader;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
@@ -14,8 +15,10 @@ import bedmark.journal.Progress;
 import bedmark.json.EntryCodec;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
+import bedmark.vault.DataKey;
 import java.io.IOException;
 import java.nio.file.Path;
+import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -25,49 +28,58 @@ import java.util.Set;
 /** Proves a whole store: the journal byte by byte, the index row by row, the photos by their digests. */
 final class StoreProof implements JournalVisitor {
     private final FileLayer files;
+    private final Cover cover;
     private final PhotoShelf shelf;
     private final Progress progress;
     private final IndexProof index;
+    private final boolean sealed;
     private final List<Defect> defects = new ArrayList<>();
     private final Set<Branch> photos = new LinkedHashSet<>();
+    private Optional<OffsetDateTime> lastAt = Optional.empty();
+    private Optional<StoreFacts.Made> backup = Optional.empty();
 
-    private StoreProof(Path folder, FileLayer files, Progress progress, IndexProof.Asker asker) {
+    private StoreProof(Path folder, FileLayer files, Optional<DataKey> key, Progress progress,
+                       IndexProof.Asker asker) {
         this.files = files;
-        this.shelf = new PhotoShelf(folder, files);
+        this.cover = Cover.of(key);
+        this.sealed = key.isPresent();
+        this.shelf = new PhotoShelf(folder, files, key);
         this.progress = progress;
         this.index = new IndexProof(asker);
     }
 
     /** Proves a store while it is open; what is saved meanwhile is left out. */
-    static StoreCheck ofOpen(Path folder, FileLayer files, Progress progress, Desk desk, Ledger ledger) {
+    static StoreCheck ofOpen(Path folder, FileLayer files, Optional<DataKey> key, Progress progress, Desk desk,
+                             Ledger ledger) {
         Journal.Extent extent = desk.call(ledger::extent);
-        return new StoreProof(folder, files, progress, new IndexProof.OfOpen(desk, ledger))
+        return new StoreProof(folder, files, key, progress, new IndexProof.OfOpen(desk, ledger))
                 .run(folder, Optional.of(extent), true);
     }
 
     /** Proves a store that this program has not open. */
-    static StoreCheck ofClosed(Path folder, FileLayer files, Progress progress) {
+    static StoreCheck ofClosed(Path folder, FileLayer files, Optional<DataKey> key, Progress progress) {
         Path indexFolder = folder.resolve(Ledger.INDEX);
         if (!files.exists(indexFolder.resolve(Database.NAME + ".mv.db"))) {
-            return unindexed(folder, files, progress, "index-missing");
+            return unindexed(folder, files, key, progress, "index-missing");
         }
-        try (Database database = Database.openToRead(indexFolder);
-             EntryReader reader = new EntryReader(folder.resolve(Ledger.JOURNAL), files)) {
+        try (Database database = Database.openToRead(indexFolder, key.map(DataKey::indexPassword));
+             EntryReader reader = new EntryReader(folder.resolve(Ledger.JOURNAL), files, Cover.of(key))) {
             Index index = Index.goOn(database, LevelOf.NONE, reader::read);
-            return new StoreProof(folder, files, progress, new IndexProof.OfClosed(index))
+            return new StoreProof(folder, files, key, progress, new IndexProof.OfClosed(index))
                     .run(folder, Optional.empty(), true);
         } catch (IndexBroken e) {
-            return unindexed(folder, files, progress, "index-unusable");
+            return unindexed(folder, files, key, progress, "index-unusable");
         } catch (Refused e) {
             if (e.defect().code().equals("store-locked")) {
-                return unindexed(folder, files, progress, "index-in-use");
+                return unindexed(folder, files, key, progress, "index-in-use");
             }
             throw e;
         }
     }
 
-    private static StoreCheck unindexed(Path folder, FileLayer files, Progress progress, String why) {
-        StoreProof proof = new StoreProof(folder, files, progress, new IndexProof.OfNone());
+    private static StoreCheck unindexed(Path folder, FileLayer files, Optional<DataKey> key, Progress progress,
+                                        String why) {
+        StoreProof proof = new StoreProof(folder, files, key, progress, new IndexProof.OfNone());
         proof.defects.add(Defect.in(Ledger.INDEX, why));
         return proof.run(folder, Optional.empty(), false);
     }
@@ -76,13 +88,14 @@ final class StoreProof implements JournalVisitor {
         Path journalFolder = folder.resolve(Ledger.JOURNAL);
         try {
             index.begin(compare);
-            JournalProof journal = JournalProof.of(journalFolder, files, extent, this);
+            JournalProof journal = JournalProof.of(journalFolder, files, cover, extent, this);
             journal.tail().ifPresent(defects::add);
             boolean equal = compare && index.end(journal.last());
             defects.addAll(index.defects());
             long named = provePhotos();
             return new StoreCheck(journal.segments(), journal.entries(), journal.last(), journal.intact(),
-                    journal.torn(), named, equal, defects);
+                    journal.torn(), named, equal, defects, new StoreFacts(journal.last(), lastAt, backup,
+                            files.usableSpace(folder), sealed));
         } catch (IOException e) {
             throw new Refused(Fault.defect("journal", e, files, journalFolder), e);
         }
@@ -93,6 +106,8 @@ final class StoreProof implements JournalVisitor {
         Optional<Entry> entry = decode(sequence, place, payload);
         index.entry(sequence, place, entry);
         entry.ifPresent(read -> {
+            lastAt = Optional.of(read.at());
+            backup = StoreFacts.Made.of(read).or(() -> backup);
             if (read.act() instanceof Act.PhotoAttached attached) {
                 photos.add(attached.photo());
             } else if (read.act() instanceof Act.SurveyTaken taken) {
@@ -123,6 +138,9 @@ final class StoreProof implements JournalVisitor {
     @Override
     public void walked(long done, long total) {
         progress.at(done, total);
+        if (progress.cancelled()) {
+            throw new Refused(Defect.in("", "work-cancelled"));
+        }
     }
 
     /** The number of photos that lie in this store. */
@@ -138,8 +156,11 @@ final class StoreProof implements JournalVisitor {
             String digest = photo.text("sha256").orElse("");
             if (!files.exists(file.get())) {
                 defects.add(Defect.in(name, "photo-missing"));
-            } else if (!shelf.digestOf(file.get()).hex().equals(digest)) {
+            } else if (shelf.digestOf(file.get()).filter(found -> found.hex().equals(digest)).isEmpty()) {
                 defects.add(Defect.in(name, "photo-differs", digest));
+            }
+            if (progress.cancelled()) {
+                throw new Refused(Defect.in("", "work-cancelled"));
             }
         }
         return named;

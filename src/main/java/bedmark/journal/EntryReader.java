@@ -19,11 +19,13 @@ public final class EntryReader implements AutoCloseable {
 
     private final Path folder;
     private final FileLayer files;
+    private final Cover cover;
     private final Map<Integer, FileLayer.Input> inputs = new LinkedHashMap<>();
 
-    public EntryReader(Path folder, FileLayer files) {
+    public EntryReader(Path folder, FileLayer files, Cover cover) {
         this.folder = folder;
         this.files = files;
+        this.cover = cover;
     }
 
     /**
@@ -35,9 +37,10 @@ public final class EntryReader implements AutoCloseable {
     public Entry read(long sequence, Place place) {
         try {
             ByteBuffer bytes = bytes(place);
-            Optional<Frame> frame = Frame.decode(bytes).filter(one -> one.sequence() == sequence);
-            if (frame.isPresent() && Digest.of(bytes).equals(place.hash())) {
-                return EntryCodec.read(frame.get().payload());
+            Optional<byte[]> payload = Frame.decode(bytes).filter(one -> one.sequence() == sequence)
+                    .filter(one -> Digest.of(bytes).equals(place.hash())).flatMap(cover::payload);
+            if (payload.isPresent()) {
+                return EntryCodec.read(payload.get());
             }
         } catch (IOException e) {
             throw new Refused(Fault.defect("journal", e, files, folder), e);

@@ -9,10 +9,11 @@ import java.util.zip.CRC32C;
  * the payload (4), sequence (8), SHA-256 of the previous entry (32), CRC32C of all this and the payload (4), payload.
  * The marker holds bytes that no UTF-8 text has, so a reader finds the next entry behind a damaged one.
  *
+ * @param form     how the payload lies there; a seal's, which is empty, is plain
  * @param sequence the entry's number; of a seal, the last entry's
  * @param previous hash of the entry before it
  */
-record Frame(Kind kind, long sequence, Digest previous, byte[] payload) {
+record Frame(Kind kind, Form form, long sequence, Digest previous, byte[] payload) {
 
     /** What a frame is. */
     enum Kind {
@@ -28,16 +29,23 @@ record Frame(Kind kind, long sequence, Digest previous, byte[] payload) {
         }
     }
 
+    /** How a payload lies on disk; the place in the list is its code. */
+    enum Form {
+        /** JSON in UTF-8. */
+        PLAIN,
+        /** The same, sealed with the store's key. */
+        SEALED
+    }
+
     static final int HEAD = 56;
     static final int LONGEST_PAYLOAD = 32 << 20;
     static final byte FIRST_OF_MARKER = (byte) 0xFE;
 
     private static final int MARKER = 0xFE_42_45_FF;
-    private static final byte PLAIN_JSON = 0;
     private static final int CRC_AT = 52;
 
     static Frame seal(long last, Digest hash) {
-        return new Frame(Kind.SEAL, last, hash, new byte[0]);
+        return new Frame(Kind.SEAL, Form.PLAIN, last, hash, new byte[0]);
     }
 
     int length() {
@@ -46,7 +54,7 @@ record Frame(Kind kind, long sequence, Digest previous, byte[] payload) {
 
     ByteBuffer encode() {
         ByteBuffer bytes = ByteBuffer.allocate(length());
-        bytes.putInt(MARKER).put(kind.code).put(PLAIN_JSON).putShort((short) 0).putInt(payload.length)
+        bytes.putInt(MARKER).put(kind.code).put((byte) form.ordinal()).putShort((short) 0).putInt(payload.length)
                 .putLong(sequence).put(previous.bytes()).putInt(0).put(payload).flip();
         return bytes.putInt(CRC_AT, crc(bytes));
     }
@@ -69,7 +77,8 @@ record Frame(Kind kind, long sequence, Digest previous, byte[] payload) {
     static Optional<Frame> decode(ByteBuffer bytes) {
         int at = bytes.position();
         if (bytes.remaining() < HEAD || lengthOf(bytes).filter(length -> length == bytes.remaining()).isEmpty()
-                || bytes.getInt(at + CRC_AT) != crc(bytes) || bytes.get(at + 5) != PLAIN_JSON) {
+                || bytes.getInt(at + CRC_AT) != crc(bytes) || bytes.get(at + 5) < 0
+                || bytes.get(at + 5) >= Form.values().length) {
             return Optional.empty();
         }
         byte[] previous = new byte[Digest.BYTES];
@@ -78,7 +87,8 @@ record Frame(Kind kind, long sequence, Digest previous, byte[] payload) {
         bytes.get(at + HEAD, payload);
         for (Kind kind : Kind.values()) {
             if (kind.code == bytes.get(at + 4)) {
-                return Optional.of(new Frame(kind, bytes.getLong(at + 12), Digest.ofBytes(previous), payload));
+                return Optional.of(new Frame(kind, Form.values()[bytes.get(at + 5)], bytes.getLong(at + 12),
+                        Digest.ofBytes(previous), payload));
             }
         }
         return Optional.empty();

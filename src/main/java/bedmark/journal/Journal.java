@@ -36,45 +36,61 @@ public final class Journal implements AutoCloseable {
     public record Extent(int segment, long length) {
     }
 
+    /**
+     * How far a journal reached at one moment.
+     *
+     * @param last the sequence number of the last entry; 0 where there is none
+     */
+    public record Reach(long last, Extent extent) {
+    }
+
     private final FileLayer files;
     private final Path folder;
     private final long segmentBytes;
+    private final Cover cover;
     private final UUID identity;
     private final List<Defect> found;
     private Optional<SegmentWriter> writer;
-    private volatile Extent extent;
     private boolean sealed;
     private int nextNumber;
-    private volatile long last;
+    private volatile Reach reach;
     private Digest hash;
 
-    private Journal(FileLayer files, Path folder, long segmentBytes, Recovery recovery) {
+    private Journal(FileLayer files, Path folder, long segmentBytes, Cover cover, Recovery recovery) {
         this.files = files;
         this.folder = folder;
         this.segmentBytes = segmentBytes;
+        this.cover = cover;
         this.identity = recovery.journal();
         this.found = List.copyOf(recovery.found());
         this.writer = recovery.writer();
         this.sealed = recovery.end().sealed();
         this.nextNumber = recovery.nextNumber();
-        this.last = recovery.end().sequence();
         this.hash = recovery.end().hash();
-        this.extent = writer.map(one -> new Extent(one.number(), one.size()))
-                .orElse(new Extent(nextNumber - 1, Long.MAX_VALUE));
+        this.reach = new Reach(recovery.end().sequence(), writer.map(one -> new Extent(one.number(), one.size()))
+                .orElse(new Extent(nextNumber - 1, Long.MAX_VALUE)));
     }
 
     /**
      * Opens a journal, and makes it where the folder is empty or missing.
      *
      * @param segmentBytes the length at which a segment is sealed
+     * @param cover        how payloads lie in it
      * @param mark         the last entry that an index knows; entries up to it are not read again
      * @param replay       takes the entries after the mark, or all of them where the mark does not fit the journal
      * @throws IOException where the folder can't be read, or can't be written though a new journal is to be made
-     * @throws Refused     {@code journal-version-unknown}
+     * @throws Refused     {@code journal-version-unknown}, {@code journal-sealed}
      */
+    public static Journal open(Path folder, FileLayer files, long segmentBytes, Cover cover, Optional<Mark> mark,
+                               Progress progress, Replay replay) throws IOException {
+        return new Journal(files, folder, segmentBytes, cover,
+                new Recovery(files, folder, cover, mark, progress).run(replay));
+    }
+
+    /** As the other one, with payloads as they are. */
     public static Journal open(Path folder, FileLayer files, long segmentBytes, Optional<Mark> mark,
                                Progress progress, Replay replay) throws IOException {
-        return new Journal(files, folder, segmentBytes, new Recovery(files, folder, mark, progress).run(replay));
+        return open(folder, files, segmentBytes, Cover.PLAIN, mark, progress, replay);
     }
 
     /** Tells this journal from every other. */
@@ -87,14 +103,19 @@ public final class Journal implements AutoCloseable {
         return found;
     }
 
+    /** How far it reaches now. */
+    public Reach reach() {
+        return reach;
+    }
+
     /** The sequence number of the last entry; 0 where there is none. */
     public long last() {
-        return last;
+        return reach.last();
     }
 
     /** How much is on the medium now. */
     public Extent extent() {
-        return extent;
+        return reach.extent();
     }
 
     /**
@@ -105,8 +126,8 @@ public final class Journal implements AutoCloseable {
      * @throws Refused  {@code entry-too-large}
      */
     public Saved append(OffsetDateTime at, String person, UUID device, Act act) {
-        Entry entry = new Entry(last + 1, at, person, device, act);
-        Frame frame = new Frame(Frame.Kind.ENTRY, entry.sequence(), hash, EntryCodec.write(entry));
+        Entry entry = new Entry(last() + 1, at, person, device, act);
+        Frame frame = cover.entry(entry.sequence(), hash, EntryCodec.write(entry));
         if (frame.payload().length > Frame.LONGEST_PAYLOAD) {
             throw new Refused(Defect.in("", "entry-too-large", Integer.toString(frame.payload().length),
                     Integer.toString(Frame.LONGEST_PAYLOAD)));
@@ -119,9 +140,8 @@ public final class Journal implements AutoCloseable {
             release();
             place = again(bytes, first);
         }
-        last = entry.sequence();
         hash = place.hash();
-        extent = new Extent(place.segment(), place.end());
+        reach = new Reach(entry.sequence(), new Extent(place.segment(), place.end()));
         return new Saved(entry, place);
     }
 
@@ -131,20 +151,20 @@ public final class Journal implements AutoCloseable {
         } catch (IOException e) {
             release();
             e.addSuppressed(first);
-            throw new NotSaved(Fault.defect("not-saved", e, files, folder, Long.toString(last)), last, e);
+            throw new NotSaved(Fault.defect("not-saved", e, files, folder, Long.toString(last())), last(), e);
         }
     }
 
     private Place write(ByteBuffer frame) throws IOException {
         if (writer.filter(open -> open.size() + frame.remaining() > segmentBytes
                 && open.size() > SegmentHeader.LENGTH).isPresent()) {
-            writer.get().append(Frame.seal(last, hash).encode());
+            writer.get().append(Frame.seal(last(), hash).encode());
             sealed = true;
             release();
         }
         if (writer.isEmpty()) {
             SegmentHeader.Follows follows = sealed ? SegmentHeader.Follows.SEALED : SegmentHeader.Follows.ABANDONED;
-            SegmentHeader header = new SegmentHeader(follows, identity, nextNumber++, last + 1, hash);
+            SegmentHeader header = new SegmentHeader(cover.form(), follows, identity, nextNumber++, last() + 1, hash);
             writer = Optional.of(SegmentWriter.create(files, folder, header));
             sealed = false;
         }

@@ -19,20 +19,27 @@ import java.util.Optional;
 public record JournalProof(int segments, long entries, long last, boolean intact, Optional<Defect> tail,
                            List<String> torn) {
 
+    /** As the other one, over a journal whose payloads lie as they are. */
+    public static JournalProof of(Path folder, FileLayer files, Optional<Journal.Extent> upTo, JournalVisitor visitor)
+            throws IOException {
+        return of(folder, files, Cover.PLAIN, upTo, visitor);
+    }
+
     /**
      * Walks over a journal from its first byte.
      *
+     * @param cover   how payloads lie in it
      * @param upTo    how much of it is looked at; nothing for all
      * @param visitor takes every sound entry and every flaw
      */
-    public static JournalProof of(Path folder, FileLayer files, Optional<Journal.Extent> upTo, JournalVisitor visitor)
-            throws IOException {
+    public static JournalProof of(Path folder, FileLayer files, Cover cover, Optional<Journal.Extent> upTo,
+                                  JournalVisitor visitor) throws IOException {
         List<SegmentFile> segments = SegmentFile.list(files, folder).stream()
                 .filter(segment -> upTo.isEmpty() || segment.number() <= upTo.get().segment())
                 .map(segment -> upTo.filter(extent -> extent.segment() == segment.number())
                         .map(extent -> segment.upTo(extent.length())).orElse(segment))
                 .toList();
-        JournalWalk.End end = new JournalWalk(files, segments, visitor).walk(Optional.empty());
+        JournalWalk.End end = new JournalWalk(files, segments, cover, visitor).walk(Optional.empty());
         Optional<Defect> tail = end.tail().map(bad -> Defect.in(segments.get(segments.size() - 1).name(),
                 "journal-tail-unread", Long.toString(bad.offset()), Long.toString(bad.length())));
         List<String> torn = files.list(folder).stream().map(file -> file.getFileName().toString())

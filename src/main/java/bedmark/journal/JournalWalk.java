@@ -29,6 +29,7 @@ final class JournalWalk {
 
     private final FileLayer files;
     private final List<SegmentFile> segments;
+    private final Cover cover;
     private final JournalVisitor visitor;
     private final List<Span> pending = new ArrayList<>();
     private long sequence;
@@ -39,9 +40,10 @@ final class JournalWalk {
     private Optional<Found.Bad> tail = Optional.empty();
     private long passed;
 
-    JournalWalk(FileLayer files, List<SegmentFile> segments, JournalVisitor visitor) {
+    JournalWalk(FileLayer files, List<SegmentFile> segments, Cover cover, JournalVisitor visitor) {
         this.files = files;
         this.segments = segments;
+        this.cover = cover;
         this.visitor = visitor;
     }
 
@@ -134,9 +136,16 @@ final class JournalWalk {
         chain(segment, good.offset(), frame.sequence(), frame.previous());
         sequence = frame.sequence();
         hash = good.hash();
+        Optional<byte[]> payload = cover.payload(frame);
+        if (payload.isEmpty()) {
+            intact = false;
+            visitor.flaw(Defect.in(segment.name(), "journal-entry-forged", Long.toString(good.offset()),
+                    Long.toString(frame.sequence())));
+            return;
+        }
         entries++;
         visitor.entry(frame.sequence(), new Place(segment.number(), good.offset(), frame.length(), good.hash()),
-                frame.payload());
+                payload.get());
     }
 
     /** Compares what comes before an entry, a seal or a segment with what was met. */

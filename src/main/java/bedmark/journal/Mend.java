@@ -108,8 +108,8 @@ final class Mend {
                         : Optional.of(SegmentWriter.goOn(files, SegmentFile.look(files, last.path(), last.number())));
             }
             Frame copied = unproven.get();
-            return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(SegmentHeader.Follows.ABANDONED,
-                    header.get().journal(), number, copied.sequence(), copied.previous()), copied));
+            return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(header.get().form(),
+                    SegmentHeader.Follows.ABANDONED, header.get().journal(), number, copied.sequence(), copied.previous()), copied));
         } catch (IOException e) {
             // What is read stays readable; the next entry begins a segment of its own, and says so if it can't.
             return Optional.empty();

@@ -1,6 +1,7 @@
 package bedmark.journal;
 
 import bedmark.document.Defect;
+import bedmark.document.Refused;
 import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.file.Path;
@@ -13,6 +14,7 @@ import java.util.UUID;
 final class Recovery {
     private final FileLayer files;
     private final Path folder;
+    private final Cover cover;
     private final Optional<Mark> mark;
     private final Progress progress;
     private final List<Defect> found = new ArrayList<>();
@@ -21,26 +23,37 @@ final class Recovery {
     private UUID journal = UUID.randomUUID();
     private JournalWalk.End end;
 
-    Recovery(FileLayer files, Path folder, Optional<Mark> mark, Progress progress) {
+    Recovery(FileLayer files, Path folder, Cover cover, Optional<Mark> mark, Progress progress) {
         this.files = files;
         this.folder = folder;
+        this.cover = cover;
         this.mark = mark;
         this.progress = progress;
     }
 
     Recovery run(Replay replay) throws IOException {
         files.createFolder(folder);
+        requireKey();
         dropParts();
         try {
             Optional<Mark> sound = mend();
             replay.begin(journal, sound.isPresent());
-            end = new JournalWalk(files, segments, new Forward(replay)).walk(sound);
+            end = new JournalWalk(files, segments, cover, new Forward(replay)).walk(sound);
             return this;
         } catch (IOException | RuntimeException e) {
             if (writer.isPresent()) {
                 writer.get().close();
             }
             throw e;
+        }
+    }
+
+    /** Before anything is mended: a sealed journal is left as it is where there is no key to read it. */
+    private void requireKey() throws IOException {
+        boolean sealed = SegmentFile.list(files, folder).stream().flatMap(segment -> segment.header().stream())
+                .anyMatch(header -> header.form() == Frame.Form.SEALED);
+        if (sealed && cover.form() == Frame.Form.PLAIN) {
+            throw new Refused(Defect.in(folder.toString(), "journal-sealed"));
         }
     }
 
@@ -71,7 +84,7 @@ final class Recovery {
         if (SegmentFile.ours(segments).isEmpty()) {
             mark.ifPresent(lost -> found.add(Defect.in(folder.getFileName().toString(), "journal-missing",
                     Long.toString(lost.sequence()))));
-            writer = Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(
+            writer = Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(cover.form(),
                     SegmentHeader.Follows.NOTHING, journal, nextNumber(), 1, Digest.NOTHING)));
             list();
         }
@@ -111,8 +124,8 @@ final class Recovery {
 
     private Optional<SegmentWriter> beginAfter(Mark lost) {
         try {
-            return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(SegmentHeader.Follows.ABANDONED,
-                    journal, nextNumber(), lost.sequence() + 1, lost.place().hash())));
+            return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(cover.form(),
+                    SegmentHeader.Follows.ABANDONED, journal, nextNumber(), lost.sequence() + 1, lost.place().hash())));
         } catch (IOException e) {
             found.add(Defect.in(folder.getFileName().toString(), "journal-missing", Long.toString(lost.sequence())));
             return Optional.empty();

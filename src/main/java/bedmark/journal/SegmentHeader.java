@@ -12,11 +12,13 @@ import java.util.zip.CRC32C;
  * The first bytes of a segment, big-endian: {@code BEDMARKJ} (8 bytes), version (4), how it follows (4), the journal's
  * identity (16), the segment's number (4), first sequence (8), hash of the entry before it (32), CRC32C (4).
  *
+ * @param form     how the payloads lie in it; sealed ones make it version 2, so that an earlier program does not take
+ *                 them for damage
  * @param first    sequence of the first entry that may stand here; what earlier segments hold from there on never
  *                 counted as saved
  * @param previous hash of the entry before the first
  */
-record SegmentHeader(Follows follows, UUID journal, int number, long first, Digest previous) {
+record SegmentHeader(Frame.Form form, Follows follows, UUID journal, int number, long first, Digest previous) {
 
     /** How a segment follows the one before it; the place in the list is its code on disk. */
     enum Follows {
@@ -30,12 +32,12 @@ record SegmentHeader(Follows follows, UUID journal, int number, long first, Dige
 
     static final int LENGTH = 80;
     private static final long MAGIC = ByteBuffer.wrap("BEDMARKJ".getBytes(StandardCharsets.US_ASCII)).getLong();
-    private static final int VERSION = 1;
+    private static final int VERSION = Frame.Form.values().length;
     private static final int CRC_AT = LENGTH - 4;
 
     ByteBuffer encode() {
         ByteBuffer bytes = ByteBuffer.allocate(LENGTH);
-        bytes.putLong(MAGIC).putInt(VERSION).putInt(follows.ordinal()).putLong(journal.getMostSignificantBits())
+        bytes.putLong(MAGIC).putInt(form.ordinal() + 1).putInt(follows.ordinal()).putLong(journal.getMostSignificantBits())
                 .putLong(journal.getLeastSignificantBits()).putInt(number).putLong(first).put(previous.bytes());
         return bytes.putInt(crc(bytes.array())).flip();
     }
@@ -51,7 +53,7 @@ record SegmentHeader(Follows follows, UUID journal, int number, long first, Dige
             return Optional.empty();
         }
         int version = bytes.getInt();
-        if (version != VERSION) {
+        if (version < 1 || version > VERSION) {
             throw new Refused(Defect.in(file, "journal-version-unknown", Integer.toString(version),
                     Integer.toString(VERSION)));
         }
@@ -62,8 +64,8 @@ record SegmentHeader(Follows follows, UUID journal, int number, long first, Dige
         byte[] previous = new byte[Digest.BYTES];
         bytes.get(previous);
         return follows < 0 || follows >= Follows.values().length ? Optional.empty()
-                : Optional.of(new SegmentHeader(Follows.values()[follows], journal, number, first,
-                        Digest.ofBytes(previous)));
+                : Optional.of(new SegmentHeader(Frame.Form.values()[version - 1], Follows.values()[follows], journal,
+                        number, first, Digest.ofBytes(previous)));
     }
 
     private static int crc(byte[] header) {

@@ -48,6 +48,12 @@ public final class EntryCodec {
             return branch.with("undone", Node.number(undone.undone()));
         } else if (act instanceof Act.PhotoAttached attached) {
             return branch.with("photo", attached.photo());
+        } else if (act instanceof Act.PhotoCaptioned captioned) {
+            return branch.with("photo", captioned.photo()).with("caption", captioned.caption());
+        } else if (act instanceof Act.PhotoDetached detached) {
+            return branch.with("photo", detached.photo());
+        } else if (act instanceof Act.PointProposed proposed) {
+            return branch.with("id", proposed.id().toString()).with("proposal", proposed.proposal());
         } else if (act instanceof Act.SurveyCompleted completed) {
             Branch signed = branch.with("signedOffBy", completed.signedOffBy());
             return completed.completedAt().map(at -> signed.with("completedAt", Node.time(at))).orElse(signed);
@@ -60,6 +66,10 @@ public final class EntryCodec {
             return branch.with("surveys", ids(noted.surveys())).with("receipt", noted.receipt());
         } else if (act instanceof Act.OfficeActed office) {
             return OfficeDeedCodec.write(office.deed(), branch);
+        }
+        if (act instanceof Act.BackupMade made) {
+            return branch.with("folder", made.folder()).with("upTo", Node.number(made.upTo()))
+                    .with("sha256", made.sha256());
         }
         throw new IllegalStateException("an act without a form on disk: " + act.code());
     }
@@ -89,12 +99,18 @@ public final class EntryCodec {
                     branch.get("answer"));
             case "answer-undone" -> new Act.AnswerUndone(uuid(branch, "survey"), number(branch, "undone"));
             case "photo-attached" -> new Act.PhotoAttached(uuid(branch, "survey"), branch(branch, "photo"));
+            case "photo-captioned" -> new Act.PhotoCaptioned(uuid(branch, "survey"), text(branch, "photo"),
+                    text(branch, "caption"));
+            case "photo-detached" -> new Act.PhotoDetached(uuid(branch, "survey"), text(branch, "photo"));
+            case "point-proposed" -> new Act.PointProposed(uuid(branch, "id"), branch(branch, "proposal"));
             case "survey-completed" -> new Act.SurveyCompleted(uuid(branch, "survey"), text(branch, "signedOffBy"),
                     branch.time("completedAt"));
             case "surveys-queued" -> new Act.SurveysQueued(ids(branch));
             case "pack-exported" -> new Act.PackExported(ids(branch), text(branch, "pack"), text(branch, "sha256"),
                     text(branch, "folder"));
             case "receipt-noted" -> new Act.ReceiptNoted(ids(branch), branch(branch, "receipt"));
+            case "backup-made" -> new Act.BackupMade(text(branch, "folder"), number(branch, "upTo"),
+                    text(branch, "sha256"));
             default -> new Act.OfficeActed(OfficeDeedCodec.read(code, branch).orElseThrow(() ->
                     new Refused(Defect.at(Pointer.of("act"), "word-unknown", code))));
         };

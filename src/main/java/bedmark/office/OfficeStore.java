@@ -16,6 +16,7 @@ import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.json.JsonReader;
 import bedmark.office.FlatColumn.FlatRow;
+import bedmark.office.trend.ZoneTrend;
 import bedmark.pack.DeviceKey;
 import bedmark.pack.PackReader;
 import bedmark.pack.ReadPack;
@@ -422,6 +423,17 @@ public final class OfficeStore implements AutoCloseable {
     public List<JudgedZone> history(ZoneId zone) {
         return ask(tables -> judged(tables, Merge.zone(zone, tables.copies(List.of(zone)),
                 minutes(tables).setAside()).results(), copy -> copy.origin().register()));
+    }
+
+    /** A zone over time. */
+    public ZoneTrend trend(ZoneId zone) {
+        List<JudgedZone> counted = history(zone);
+        Set<String> digests = new HashSet<>();
+        counted.forEach(one -> digests.add(one.copy().digest()));
+        List<JudgedZone> replaced = ask(tables -> judged(tables, tables.copies(List.of(zone)).stream()
+                .filter(copy -> copy.result() && !digests.contains(copy.digest())).toList(),
+                copy -> copy.origin().register()));
+        return ZoneTrend.of(zone, counted, replaced);
     }
 
     /** The digests of everything that came, by zone, survey and revision. */

@@ -13,7 +13,7 @@ import java.util.zip.CRC32;
  * Looks at the first bytes of a photo without decoding it: is it a JPEG (ITU-T T.81) or a PNG (ISO/IEC 15948), and
  * how large would it become in memory?
  */
-final class PhotoHeader {
+public final class PhotoHeader {
     private static final int JPEG = 0xFFD8;
     private static final int PNG_START = 0x8950;
     private static final long PNG_REST = 0x4E47_0D0A_1A0AL;
@@ -36,7 +36,7 @@ final class PhotoHeader {
      *
      * @param in read only as far as the header goes
      */
-    static Optional<Defect> doubt(String shown, InputStream in, PackLimits limits) throws IOException {
+    public static Optional<Defect> doubt(String shown, InputStream in, PackLimits limits) throws IOException {
         return new PhotoHeader(shown, in, limits).doubt();
     }
 

@@ -5,8 +5,6 @@ import bedmark.document.Refused;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.channels.ClosedByInterruptException;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.zip.CRC32;
@@ -17,9 +15,10 @@ import java.util.zip.CheckedInputStream;
  * then to copy it, and only the copy is what the digest is proved on.
  *
  * @param claim what the bundle says of it
- * @param crc   CRC-32 of the file when it was first read
+ * @param photo where it lies
+ * @param crc   CRC-32 of the photo when it was first read
  */
-record SourcePhoto(PackedPhoto claim, Path file, long crc) {
+record SourcePhoto(PackedPhoto claim, PhotoSource.Photo photo, long crc) {
     private static final int PIECE = 1 << 16;
 
     /**
@@ -29,10 +28,10 @@ record SourcePhoto(PackedPhoto claim, Path file, long crc) {
      *                 {@link PhotoHeader} has against it
      */
     static SourcePhoto find(PackedPhoto claim, PhotoSource source, PackLimits limits, Work work) {
-        Path file = source.find(claim.name(), claim.sha256()).filter(Files::isRegularFile)
+        PhotoSource.Photo photo = source.find(claim.name(), claim.sha256())
                 .orElseThrow(() -> refused(claim, "pack-photo-missing"));
-        try (DigestStream content = new DigestStream(Files.newInputStream(file), List.of(), work)) {
-            if (Files.size(file) != claim.bytes()) {
+        try (DigestStream content = new DigestStream(photo.open(), List.of(), work)) {
+            if (photo.size() != claim.bytes()) {
                 throw refused(claim, "pack-photo-differs");
             }
             CheckedInputStream checked = new CheckedInputStream(content, new CRC32());
@@ -41,7 +40,7 @@ record SourcePhoto(PackedPhoto claim, Path file, long crc) {
                 throw new Refused(defect);
             });
             checked.transferTo(OutputStream.nullOutputStream());
-            return new SourcePhoto(claim, file, checked.getChecksum().getValue());
+            return new SourcePhoto(claim, photo, checked.getChecksum().getValue());
         } catch (IOException e) {
             throw unreadable(claim, e);
         }
@@ -78,7 +77,7 @@ record SourcePhoto(PackedPhoto claim, Path file, long crc) {
 
         Reading(Work work) {
             try {
-                content = new DigestStream(Files.newInputStream(file), List.of(Sha256.BAG_NAME), work);
+                content = new DigestStream(photo.open(), List.of(Sha256.BAG_NAME), work);
             } catch (IOException e) {
                 throw unreadable(claim, e);
             }

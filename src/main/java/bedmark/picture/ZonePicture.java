@@ -43,7 +43,7 @@ public final class ZonePicture {
             new SectionView(sketch, room, ground, draft).draw(dimension);
         } else {
             double ground = layout.scale().plot().bottom() + draft.mm(SideLayout.BELT / 2);
-            Box room = new Box(left, 0, sheet.width() - left, ground);
+            Box room = new Box(left, sheet.corner(), sheet.width() - left, ground - sheet.corner());
             new SectionView(sketch, room, ground, draft).draw(layout.rowMiddle(0, draft));
         }
         drawing = draft.finish();

@@ -19,6 +19,9 @@ import javafx.beans.property.SimpleObjectProperty;
 
 /** What all screens share: the store, who works here and how, and where work is done that takes time. */
 public final class Workplace implements AutoCloseable {
+    /** The code of a failure of the program itself, which leaves everything saved. */
+    static final String FAILED = "screen-failed";
+
     private final Store store;
     private final Clock clock;
     private final Executor screen;
@@ -60,7 +63,7 @@ public final class Workplace implements AutoCloseable {
     }
 
     private static Wording wording(Preferences preferences) {
-        return new Wording(new Words(preferences.locale()), preferences.units());
+        return new Wording(new Words(preferences.locale()), preferences.units(), preferences.chosenUnits());
     }
 
     private Optional<Site> readSite() {
@@ -70,6 +73,11 @@ public final class Workplace implements AutoCloseable {
     /** Takes a register in. Runs beside the screen. */
     public void adopt(Act register) {
         store.append(preferences.get().person(), register);
+        reread();
+    }
+
+    /** Reads the plant anew, where it may have changed. Runs beside the screen. */
+    public void reread() {
         Optional<Site> read = readSite();
         screen.execute(() -> site.set(read));
     }
@@ -129,7 +137,7 @@ public final class Workplace implements AutoCloseable {
 
     /** Shows a failure of the program itself in the head of the screen, in words. */
     void report(Throwable failure) {
-        scribe.report(Defect.in("", "screen-failed", failure.getClass().getSimpleName()));
+        scribe.report(Defect.in("", FAILED, failure.getClass().getSimpleName()));
     }
 
     /** Runs work that takes time beside the screen, one after the other. */

@@ -193,6 +193,66 @@ public sealed interface Act {
     }
 
     /**
+     * A photo's caption was written or changed.
+     *
+     * @param photo   the photo's id
+     * @param caption empty takes it away
+     */
+    record PhotoCaptioned(UUID survey, String photo, String caption) implements Act {
+        public PhotoCaptioned {
+            Objects.requireNonNull(survey);
+            Objects.requireNonNull(photo);
+            Objects.requireNonNull(caption);
+        }
+
+        @Override
+        public String code() {
+            return "photo-captioned";
+        }
+
+        @Override
+        public Optional<UUID> about() {
+            return Optional.of(survey);
+        }
+    }
+
+    /** A photo was taken off a survey; its file stays in the store, as everything does. */
+    record PhotoDetached(UUID survey, String photo) implements Act {
+        public PhotoDetached {
+            Objects.requireNonNull(survey);
+            Objects.requireNonNull(photo);
+        }
+
+        @Override
+        public String code() {
+            return "photo-detached";
+        }
+
+        @Override
+        public Optional<UUID> about() {
+            return Optional.of(survey);
+        }
+    }
+
+    /**
+     * A transfer point was found in the field that the register does not hold. The office decides about it; the last
+     * proposal of an id stands.
+     *
+     * @param proposal as {@code proposals} of a bundle; an empty one withdraws it
+     */
+    record PointProposed(UUID id, Branch proposal) implements Act {
+        public PointProposed {
+            Objects.requireNonNull(id);
+            Objects.requireNonNull(proposal);
+        }
+
+        @Override
+        public String code() {
+            return "point-proposed";
+        }
+    }
+
+    /**
      * A survey was completed.
      *
      * @param signedOffBy the person who signed it off; empty where nobody did
@@ -251,6 +311,25 @@ public sealed interface Act {
         @Override
         public String code() {
             return "pack-exported";
+        }
+    }
+
+    /**
+     * A backup of the whole store was made and proved.
+     *
+     * @param folder where it lies
+     * @param upTo   the last entry that it holds
+     * @param sha256 digest of its list of files, hexadecimal
+     */
+    record BackupMade(String folder, long upTo, String sha256) implements Act {
+        public BackupMade {
+            Objects.requireNonNull(folder);
+            Objects.requireNonNull(sha256);
+        }
+
+        @Override
+        public String code() {
+            return "backup-made";
         }
     }
 

@@ -18,6 +18,9 @@ import java.util.Optional;
  */
 public record SurveyHistory(Branch base, Survey survey, QueueState state, List<Change> changes) {
 
+    /** Where a survey tells what it and its predecessors correct, oldest first. */
+    public static final String REVISIONS = "revisions";
+
     /**
      * One answer as it was set.
      *
@@ -47,7 +50,7 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
             return Optional.of(begun(opened.document(), QueueState.OPEN));
         }
         if (act instanceof Act.RevisionOpened opened) {
-            return Optional.of(begun(opened.document(), QueueState.OPEN));
+            return Optional.of(begun(chained(entry, opened), QueueState.OPEN));
         }
         if (act instanceof Act.SurveyTaken taken) {
             return Optional.of(begun(taken.document(), QueueState.RECEIVED));
@@ -57,6 +60,22 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
 
     private static SurveyHistory begun(Branch document, QueueState state) {
         return new SurveyHistory(document, new Survey(document), state, List.of());
+    }
+
+    /** A revision tells what it corrects, why and by whom, after what the corrected one tells of its own past. */
+    private static Branch chained(Entry entry, Act.RevisionOpened opened) {
+        List<Node> revisions = new ArrayList<>(opened.document().series(REVISIONS));
+        String corrected = opened.supersedes().toString();
+        for (Branch earlier : opened.document().branches(REVISIONS)) {
+            if (earlier.text("id").filter(corrected::equals).isPresent()) {
+                return opened.document();
+            }
+        }
+        revisions.add(Branch.EMPTY.with("id", corrected)
+                .with("revision", Node.number(new Survey(opened.document()).revision() - 1L))
+                .with("why", opened.why()).with("correctedBy", entry.person())
+                .with("correctedAt", Node.time(entry.at())));
+        return opened.document().with(REVISIONS, new Node.Series(revisions));
     }
 
     /** The newest change that still counts: what an undo would take back. */
@@ -83,12 +102,18 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
             return undone(undone.undone());
         }
         if (act instanceof Act.PhotoAttached attached) {
-            requireOpen();
-            List<Node> photos = new ArrayList<>(survey.document().series("photos"));
+            List<Branch> photos = new ArrayList<>(survey.photos());
             photos.add(attached.photo());
-            Node.Series longer = new Node.Series(photos);
-            return new SurveyHistory(base.with("photos", longer), new Survey(survey.document().with("photos", longer)),
-                    state, changes);
+            return withPhotos(photos);
+        }
+        if (act instanceof Act.PhotoCaptioned captioned) {
+            return withPhotos(survey.photos().stream().map(photo -> !isPhoto(photo, captioned.photo()) ? photo
+                    : captioned.caption().isBlank() ? photo.without("caption")
+                    : photo.with("caption", captioned.caption())).toList(), captioned.photo());
+        }
+        if (act instanceof Act.PhotoDetached detached) {
+            return withPhotos(survey.photos().stream().filter(photo -> !isPhoto(photo, detached.photo())).toList(),
+                    detached.photo());
         }
         if (act instanceof Act.SurveyCompleted completed) {
             Branch finished = survey.document().with("completedAt",
@@ -107,6 +132,25 @@ public record SurveyHistory(Branch base, Survey survey, QueueState state, List<C
             return moved(QueueState.RECEIVED);
         }
         return this;
+    }
+
+    private static boolean isPhoto(Branch photo, String id) {
+        return photo.text("id").equals(Optional.of(id));
+    }
+
+    private SurveyHistory withPhotos(List<Branch> photos, String changed) {
+        if (survey.photos().stream().noneMatch(photo -> isPhoto(photo, changed))) {
+            throw new IllegalStateException("photo " + changed + " is not attached");
+        }
+        return withPhotos(photos);
+    }
+
+    /** Photos belong to what undoing an answer starts from, so that it takes none away. */
+    private SurveyHistory withPhotos(List<Branch> photos) {
+        requireOpen();
+        Node.Series series = new Node.Series(List.copyOf(photos));
+        return new SurveyHistory(base.with("photos", series), new Survey(survey.document().with("photos", series)),
+                state, changes);
     }
 
     private SurveyHistory answered(Entry entry, Act.AnswerSet set) {

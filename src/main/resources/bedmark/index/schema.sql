@@ -6,7 +6,7 @@ create table settings (
   content varchar(200) not null
 );
 
--- The last entry that was taken in, and how many there are: one row.
+-- The last entry that was taken in, how many there are, and how many of each kind that is looked for: one row.
 create table mark (
   one int primary key,
   sequence_no bigint not null,
@@ -15,6 +15,7 @@ create table mark (
   byte_length int not null,
   hash binary(32) not null,
   entries bigint not null,
+  landmarks varchar not null,
   seal binary(32) not null
 );
 
@@ -40,7 +41,7 @@ create table touch (
 );
 create index touch_entry on touch (sequence_no);
 
--- Entries that are looked for by what they are: registers and packs.
+-- Entries that are looked for by what they are: registers, packs, receipts, backups.
 create table landmark (
   act varchar(40) not null,
   sequence_no bigint not null,

@@ -25,7 +25,7 @@ class AllowedDepthTest {
     void aBedAsDeepAsAllowedStandsOnTheLimit() {
         Random random = new Random(31);
         Set<Rule> tried = EnumSet.noneOf(Rule.class);
-        for (int i = 0; i < 3_000; i++) {
+        for (int i = 0; i < Zones.MANY; i++) {
             LoadingZone zone = Zones.exact(Zones.random(random));
             DragMethod method = DragMethod.values()[random.nextInt(4)];
             Settings settings = Zones.exactSettings().with(method);

@@ -15,6 +15,16 @@ class ConveyorTest {
     private static final LoadingZone ZONE = Zones.healthy();
 
     @Test
+    void noWarningLiesBeyondTheBudget() {
+        for (double budget : new double[] {0.03, 0.2}) {
+            Finding finding = skirts(Engine.assess(Zones.healthy().with(Datum.SKIRT_POWER_BUDGET, budget, 0),
+                    Settings.standard())).orElseThrow();
+            assertEquals(budget, finding.overloaded().orElseThrow());
+            assertEquals(Math.min(0.10, budget), finding.near().orElseThrow());
+        }
+    }
+
+    @Test
     void zonesOfAConveyorAddUp() {
         double one = skirts(Engine.assess(ZONE, Settings.standard())).orElseThrow().observed();
         List<Assessment> three = Engine.assessConveyor(Collections.nCopies(3, ZONE), 0, Settings.standard()).zones();

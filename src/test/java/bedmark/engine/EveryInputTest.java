@@ -33,7 +33,7 @@ class EveryInputTest {
     @Test
     void aPossibleZoneGivesFiniteNumbers() {
         Random random = new Random(3);
-        for (int i = 0; i < 3_000; i++) {
+        for (int i = 0; i < Zones.MANY; i++) {
             LoadingZone zone = Zones.random(random);
             Settings settings = random.nextInt(4) == 0
                     ? Settings.standard().with(DragMethod.values()[random.nextInt(4)]) : Settings.standard();
@@ -63,7 +63,7 @@ class EveryInputTest {
     @Test
     void theGreatestAndTheLeastPossibleNumbersStayFinite() {
         Random random = new Random(5);
-        for (int i = 0; i < 2_000; i++) {
+        for (int i = 0; i < Zones.MANY; i++) {
             LoadingZone zone = Zones.random(random);
             Map<Datum, Reading> data = new EnumMap<>(zone.data());
             for (Datum datum : List.of(Datum.BELT_SPEED, Datum.THROUGHPUT, Datum.RATED_POWER, Datum.BULK_DENSITY,

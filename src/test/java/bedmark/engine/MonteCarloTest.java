@@ -26,6 +26,7 @@ import org.junit.jupiter.api.Test;
 class MonteCarloTest {
     private static final Settings DRAWING =
             Settings.standard().with(Conventions.standard().withTrials(2_000));
+    private static final Settings FIRST_ORDER = Settings.standard().with(Conventions.standard().withTrials(0));
     private static final int TRIALS = 6_000;
     private static final long SEED = 7;
     private static final LoadingZone ZONE = Zones.healthy();
@@ -121,9 +122,12 @@ class MonteCarloTest {
             level = level.withStation(0.5 + i, 0.37, DepthMethod.AT_BOARD, 0.02);
         }
         double drawn = drawn(level).chances().get(Rule.BED_OVER_BOARD).overloaded().orElseThrow();
-        double one = finding(Engine.assess(level, Settings.standard()), Rule.BED_OVER_BOARD).probabilityOverloaded()
+        double one = finding(Engine.assess(level, FIRST_ORDER), Rule.BED_OVER_BOARD).probabilityOverloaded()
                 .orElseThrow();
         assertTrue(drawn > 2 * one && drawn < 4 * one, drawn + " for " + one);
+        Finding judged = finding(Engine.assess(level, Settings.standard()), Rule.BED_OVER_BOARD);
+        assertTrue(judged.drawn(), "which an assessment finds too");
+        assertEquals(drawn, judged.probabilityOverloaded().orElseThrow(), 0.02);
     }
 
     @Test
@@ -193,12 +197,12 @@ class MonteCarloTest {
         LoadingZone coarseButFar = ZONE.withStations(List.of()).withStation(3, 0.05, DepthMethod.AT_BOARD, 0.01);
         LoadingZone doubtfulButFine = ZONE.withStations(List.of()).withStation(3, 0.399, DepthMethod.AT_BOARD, 0.005);
         for (LoadingZone zone : List.of(ZONE, coarseButFar, doubtfulButFine)) {
-            assertTrue(Engine.assess(zone, DRAWING).findings().stream().noneMatch(Finding::drawn));
+            assertTrue(Engine.assess(zone, DRAWING).findings().stream().noneMatch(Finding::drawn), zone::toString);
         }
         LoadingZone coarse = ZONE.withStations(List.of()).withStation(3, 0.2, DepthMethod.AT_BOARD, 0.03);
         assertTrue(finding(Engine.assess(coarse, DRAWING), Rule.BED_OVER_DESIGN).drawn());
-        assertFalse(finding(Engine.assess(coarse, Settings.standard()), Rule.BED_OVER_DESIGN).drawn(),
-                "unless the site asks for it, a tablet answers by the first order alone");
+        assertTrue(finding(Engine.assess(coarse, Settings.standard()), Rule.BED_OVER_DESIGN).drawn());
+        assertFalse(finding(Engine.assess(coarse, FIRST_ORDER), Rule.BED_OVER_DESIGN).drawn(), "a site may forbid it");
     }
 
     @Test
@@ -213,9 +217,40 @@ class MonteCarloTest {
         assertTrue(finding(zones.get(1), Rule.SKIRTS_OVER_BUDGET).drawn());
     }
 
+    /** An assessment draws what is not straight and takes the rest by its derivatives: the whole drawing agrees. */
+    @Test
+    void theDrawingOfAnAssessmentAgreesWithTheWholeOne() {
+        Random random = new Random(83);
+        int compared = 0;
+        double apart = 0;
+        for (int i = 0; i < 600 && compared < 60; i++) {
+            LoadingZone zone = Zones.random(random);
+            Assessment assessment = Engine.assess(zone, Settings.standard());
+            if (assessment.findings().stream().noneMatch(Finding::drawn)) {
+                continue;
+            }
+            Map<Rule, Chance> whole = Engine.monteCarlo(List.of(zone), Settings.standard(), i, 4_000).get(0).chances();
+            for (Finding finding : assessment.findings()) {
+                if (finding.drawn() && whole.containsKey(finding.rule())) {
+                    Chance chance = whole.get(finding.rule());
+                    compared++;
+                    if (finding.overloaded().isPresent()) {
+                        double off = finding.probabilityOverloaded().orElseThrow() - chance.overloaded().orElseThrow();
+                        assertEquals(0, off, 0.04, finding + " of " + zone);
+                        apart += Math.abs(off);
+                    }
+                    assertEquals(chance.near().orElseThrow(), finding.probabilityNear().orElseThrow(), 0.04,
+                            finding::toString);
+                }
+            }
+        }
+        assertTrue(compared >= 60, "compared " + compared);
+        assertTrue(apart / compared < 0.01, "on average " + apart / compared);
+    }
+
     @Test
     void trialsThatCannotBeAreRefused() {
-        for (int trials : new int[]{0, -1, 1_000_001}) {
+        for (int trials : new int[]{0, -1, 100_001}) {
             ImpossibleReading refusal = assertThrows(ImpossibleReading.class,
                     () -> Engine.monteCarlo(List.of(ZONE), Settings.standard(), 1, trials));
             assertEquals("trials-impossible", refusal.code());

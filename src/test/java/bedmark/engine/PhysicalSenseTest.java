@@ -124,7 +124,7 @@ class PhysicalSenseTest {
     @Test
     void depthIsTheInverseOfArea() {
         Random random = new Random(7);
-        for (int i = 0; i < 2_000; i++) {
+        for (int i = 0; i < Zones.MANY; i++) {
             Section section = section(random);
             double depth = random.nextDouble();
             Uncertain area = section.area(Uncertain.exact(depth));
@@ -168,7 +168,7 @@ class PhysicalSenseTest {
 
     private static void overZones(Consumer<LoadingZone> property) {
         Random random = new Random(11);
-        for (int i = 0; i < 400; i++) {
+        for (int i = 0; i < Zones.MANY; i++) {
             LoadingZone zone = Zones.exact(Zones.random(random));
             property.accept(zone.withStations(zone.stations().stream().map(station -> new Station(station.position(),
                     station.raw(), DepthMethod.AT_BOARD)).toList()));

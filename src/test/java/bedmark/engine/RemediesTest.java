@@ -8,6 +8,7 @@ import bedmark.engine.bed.DepthMethod;
 import bedmark.engine.seal.SealCondition;
 import bedmark.engine.seal.SealType;
 import bedmark.engine.seal.Side;
+import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Limit;
 import bedmark.engine.verdict.Remedy;
 import bedmark.engine.verdict.Rule;
@@ -28,6 +29,27 @@ class RemediesTest {
         assertEquals("free-bed", remedies.get(0).code());
         assertTrue(remedies.get(0).skirtPower() < power(lagging));
         assertTrue(find(DEEP, "free-bed").isEmpty(), "no scale, no ratio");
+    }
+
+    /** What lagged unevenly lies evenly once it moves at belt speed: the shape of before refuses nothing. */
+    @Test
+    void aFreedBedIsJudgedByItsOwnShape() {
+        LoadingZone heaped = ZONE.withStations(List.of()).with(Datum.THROUGHPUT, 210, 0)
+                .withStation(4.5, 0.36, DepthMethod.AT_BOARD, 0).withStation(5.5, 0.24, DepthMethod.AT_BOARD, 0);
+        assertEquals(Level.NEAR, Engine.assess(heaped, Zones.exactSettings()).findings().stream()
+                .filter(finding -> finding.rule() == Rule.BED_NOT_SETTLED).findFirst().orElseThrow().level());
+        Remedy freed = find(heaped, "free-bed").orElseThrow();
+        assertEquals(Optional.empty(), freed.refusedBecause());
+        LoadingZone even = heaped.withStations(List.of())
+                .withStation(1, freed.meanDepth(), DepthMethod.AT_BOARD, 0);
+        assertTrue(freed.meanDepth() > 0 && freed.meanDepth() < 0.2, freed::toString);
+        assertEquals(freed.skirtPower(), power(even), 1e-9 * power(even));
+        assertEquals(1, Engine.assess(even, Zones.exactSettings()).get(Result.BED_SPEED_RATIO).orElseThrow().value(),
+                1e-9);
+        LoadingZone settled = ZONE.withStations(List.of()).with(Datum.THROUGHPUT, 260, 0)
+                .withStation(1, 0.30, DepthMethod.AT_BOARD, 0).withStation(5.5, 0.28, DepthMethod.AT_BOARD, 0);
+        assertEquals(Optional.empty(), find(settled, "free-bed").orElseThrow().refusedBecause(),
+                "a little unevenness does not grow with the depth that goes");
     }
 
     @Test
@@ -93,6 +115,10 @@ class RemediesTest {
         assertEquals(1.5 + 1.2 * 2, remedy.change().orElseThrow(), 1e-12);
         assertEquals(power(ZONE) * 3.9 / 6, remedy.skirtPower(), 1e-9 * power(ZONE));
         assertTrue(find(ZONE.with(Datum.IMPACT_LENGTH, 3.6, 0), "shorten-zone").isEmpty());
+        Settings roomy = Settings.standard().with(Settings.standard().limits().with(Rule.ZONE_TOO_SHORT,
+                Limit.ofSite(OptionalDouble.of(1.2), OptionalDouble.empty())));
+        assertEquals(1.2 * 3.9, Engine.assess(ZONE, roomy).remedies().stream()
+                .filter(one -> one.code().equals("shorten-zone")).findFirst().orElseThrow().change().orElseThrow(), 1e-12);
     }
 
     @Test

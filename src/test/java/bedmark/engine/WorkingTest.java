@@ -143,6 +143,22 @@ class WorkingTest {
         assertEquals(9.80665, inputs.get("g").symbol().value());
     }
 
+    /** The rate of the seals is the fitted one only where the site's own method decides and a rate was fitted. */
+    @Test
+    void theRateOfTheSealsIsShownWhereItComesFrom() {
+        LoadingZone fitted = Zones.healthy().with(Datum.SITE_FACTOR, 0.08, 0).with(Datum.SITE_SEAL_RATE, 55, 0);
+        assertEquals(Optional.of(Datum.SITE_SEAL_RATE.pointer()), rate(fitted, Settings.standard()
+                .with(DragMethod.SITE)));
+        assertEquals(Optional.of("/plant/sealRates"), rate(fitted, Settings.standard()));
+        assertEquals(Optional.of("/plant/sealRates"), rate(fitted.without(Datum.SITE_SEAL_RATE),
+                Settings.standard().with(DragMethod.SITE)));
+    }
+
+    private static Optional<String> rate(LoadingZone zone, Settings settings) {
+        return Engine.explain(zone, settings).inputs().stream().map(Working.Input::symbol)
+                .filter(symbol -> symbol.sign().equals("q")).findFirst().orElseThrow().reading();
+    }
+
     @Test
     void anEmptyZoneHasNothingToShow() {
         Working working = Engine.explain(LoadingZone.UNKNOWN, Settings.standard());

@@ -18,6 +18,9 @@ import java.util.Random;
 
 /** Loading zones for tests: one that is as it should be, and as many random ones as wanted. */
 final class Zones {
+    /** How many random zones a property is tried on. */
+    static final int MANY = Integer.getInteger("bedmark.zones", 10_000);
+
     private static final Instruments INSTRUMENTS = Instruments.standard();
 
     private Zones() {

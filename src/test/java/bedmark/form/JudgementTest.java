@@ -58,7 +58,7 @@ class JudgementTest {
 
     @ParameterizedTest
     @CsvSource({"2, METRE, 20, METRE, ten-times-off-last", "20, METRE, 2, METRE, ten-times-off-last",
-        "1.8, METRE, 20, METRE, ten-times-off-last", "6.1, METRE, 20, FOOT, ''", "6, METRE, 1, METRE, ''",
+        "1.8, METRE, 20, METRE, ten-times-off-last", "6.1, METRE, 20, FOOT, ''", "4, METRE, 1, METRE, ''",
         "20, FOOT, 0.61, METRE, ten-times-off-last", "2, METRE, 0, METRE, ''"})
     void slippedDecimalSignIsQuestioned(String now, Unit unit, String then, Unit before, String code) {
         assertEquals(code.isEmpty() ? List.of() : List.of(code),

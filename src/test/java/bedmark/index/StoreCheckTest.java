@@ -67,7 +67,8 @@ class StoreCheckTest {
         List<Long> progress = new ArrayList<>();
         StoreCheck check = Store.check(folder, new QuickLayer(), (done, total) -> progress.add(done * 100 / total));
         assertTrue(check.sound(), () -> check.defects().toString());
-        assertEquals(new StoreCheck(1, 18, 18, true, List.of(), 1, true, List.of()), check);
+        assertEquals(new StoreCheck(1, 18, 18, true, List.of(), 1, true, List.of(), check.facts()),
+                check);
         assertEquals(100, progress.get(progress.size() - 1));
         assertEquals(before, everyFile());
     }

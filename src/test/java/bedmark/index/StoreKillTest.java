@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.document.Refused;
+import bedmark.journal.Cover;
 import bedmark.journal.FileLayer;
 import bedmark.journal.JournalProof;
 import bedmark.journal.JournalVisitor;
@@ -27,8 +28,9 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
 import java.util.TreeMap;
-import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /**
  * A real process types and saves and is killed in the middle, again and again on the same store. The number of kills
@@ -42,16 +44,16 @@ class StoreKillTest {
 
     private final Map<Long, String> acknowledged = new TreeMap<>();
 
-    private Process start(int number) throws IOException {
+    private Process start(int number, boolean sealed) throws IOException {
         return new ProcessBuilder(Path.of(System.getProperty("java.home"), "bin", "java").toString(),
                 "-XX:TieredStopAtLevel=1", "-XX:+UseSerialGC", "-Xmx128m", "-cp", System.getProperty("java.class.path"),
-                TypingChild.class.getName(), folder.toString(), "child" + number)
+                TypingChild.class.getName(), folder.toString(), "child" + number, Boolean.toString(sealed))
                 .redirectError(ProcessBuilder.Redirect.INHERIT).start();
     }
 
     /** Kills a child after so many lines, and hears what it still said before it died. */
-    private void run(int number, int lines) throws IOException, InterruptedException {
-        Process child = start(number);
+    private void run(int number, int lines, boolean sealed) throws IOException, InterruptedException {
+        Process child = start(number, sealed);
         try (BufferedReader output = new BufferedReader(
                 new InputStreamReader(child.getInputStream(), StandardCharsets.UTF_8))) {
             int heard = 0;
@@ -59,7 +61,7 @@ class StoreKillTest {
                 hear(line);
                 if (heard == 0 && number == 0) {
                     assertEquals("store-locked", assertThrows(Refused.class, () ->
-                            Store.open(folder, StoreOptions.of("second"))).defect().code());
+                            Store.open(folder, options("second", sealed))).defect().code());
                 }
                 if (heard++ == lines) {
                     // By its handle, since the process itself would close the output that is still to be heard.
@@ -79,28 +81,36 @@ class StoreKillTest {
         }
     }
 
-    @Test
-    void aKilledProgramLosesNothingThatItReportedSaved() throws IOException, InterruptedException {
+    private static StoreOptions options(String device, boolean sealed) {
+        return StoreOptions.of(device).withPassphrase(sealed ? Optional.of(StoreScript.SECRET) : Optional.empty());
+    }
+
+    @ParameterizedTest
+    @ValueSource(booleans = {false, true})
+    void aKilledProgramLosesNothingThatItReportedSaved(boolean sealed) throws IOException, InterruptedException {
+        StoreScript.home(folder, sealed);
         Random random = new Random(1);
-        for (int i = 0; i < KILLS; i++) {
-            run(i, random.nextInt(40));
+        int kills = sealed ? (KILLS + 2) / 3 : KILLS;
+        for (int i = 0; i < kills; i++) {
+            run(i, random.nextInt(40), sealed);
         }
-        assertTrue(acknowledged.size() > KILLS, () -> "only " + acknowledged.size() + " were saved");
-        Store.check(folder, FileLayer.disk(), Progress.NONE).defects().forEach(defect ->
+        assertTrue(acknowledged.size() > kills, () -> "only " + acknowledged.size() + " were saved");
+        Store.check(folder, FileLayer.disk(), options("", sealed).passphrase(), Progress.NONE).defects().forEach(defect ->
                 assertTrue(defect.code().equals("journal-tail-unread"), defect.toString()));
         Map<Long, String> there = new HashMap<>();
         List<String> notes = new ArrayList<>();
-        try (Store store = Store.open(folder, StoreOptions.of("tablet"))) {
+        try (Store store = Store.open(folder, options("tablet", sealed))) {
             StoreCheck check = store.check(Progress.NONE);
             assertTrue(check.sound(), () -> check.defects().toString());
-            read(there, notes);
         }
+        read(there, notes, sealed);
         acknowledged.forEach((sequence, line) -> assertEquals(line, there.get(sequence), "entry " + sequence));
         assertEquals(notes.stream().distinct().toList(), notes, "nothing is there twice");
     }
 
-    private void read(Map<Long, String> there, List<String> notes) throws IOException {
-        JournalProof.of(folder.resolve("journal"), FileLayer.disk(), Optional.empty(), new JournalVisitor() {
+    private void read(Map<Long, String> there, List<String> notes, boolean sealed) throws IOException {
+        Cover cover = Cover.of(Keys.look(folder, FileLayer.disk(), options("", sealed).passphrase()));
+        JournalProof.of(folder.resolve("journal"), FileLayer.disk(), cover, Optional.empty(), new JournalVisitor() {
             @Override
             public void entry(long sequence, Place place, byte[] payload) {
                 Entry entry = EntryCodec.read(payload);

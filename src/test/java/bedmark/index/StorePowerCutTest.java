@@ -18,8 +18,9 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Random;
-import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** The power goes while a store is at work; the database is found as of some earlier time, whole or cut. */
 class StorePowerCutTest {
@@ -32,12 +33,13 @@ class StorePowerCutTest {
     private record Acknowledged(int after, int answers, int photos, byte[] database) {
     }
 
-    @Test
-    void aStoreOpensWithAllThatWasReportedSaved() throws IOException {
-        Path home = Files.createDirectories(folder.resolve("live"));
+    @ParameterizedTest
+    @ValueSource(booleans = {false, true})
+    void aStoreOpensWithAllThatWasReportedSaved(boolean sealed) throws IOException {
+        Path home = StoreScript.home(Files.createDirectories(folder.resolve("live")), sealed);
         PowerCutDisk disk = new PowerCutDisk(home);
         List<Acknowledged> told = new ArrayList<>();
-        try (Store store = Store.open(home, options().withFiles(disk).withSegmentBytes(2048))) {
+        try (Store store = Store.open(home, options(sealed).withFiles(disk).withSegmentBytes(2048))) {
             Path database = home.resolve("index").resolve("bedmark.mv.db");
             store.append(PERSON, StoreScript.opened(id(1), "T1"));
             for (int i = 0; i < 12; i++) {
@@ -53,13 +55,13 @@ class StorePowerCutTest {
             }
         }
         Random random = new Random(3);
-        for (int i = 0; i < CUTS; i++) {
-            check(disk, told, random, folder.resolve("image" + i));
+        for (int i = 0; i < (sealed ? CUTS / 2 : CUTS); i++) {
+            check(disk, told, random, folder.resolve("image" + i), sealed);
         }
     }
 
-    private static void check(PowerCutDisk disk, List<Acknowledged> told, Random random, Path image)
-            throws IOException {
+    private static void check(PowerCutDisk disk, List<Acknowledged> told, Random random, Path image,
+                              boolean sealed) throws IOException {
         int cut = random.nextInt(disk.operations() + 1);
         PowerCutDisk.Fate fate = PowerCutDisk.Fate.values()[random.nextInt(3)];
         disk.layOut(cut, fate, random, image);
@@ -71,7 +73,7 @@ class StorePowerCutTest {
                     whole ? database : Arrays.copyOf(database, random.nextInt(database.length)));
         }
         String where = "after operation " + cut + ", " + fate;
-        try (Store store = Store.open(image, options().withFiles(new QuickLayer()))) {
+        try (Store store = Store.open(image, options(sealed).withFiles(new QuickLayer()))) {
             if (!saved.isEmpty()) {
                 Acknowledged last = saved.get(saved.size() - 1);
                 SurveyHistory history = store.history(id(1)).orElseThrow();

@@ -25,8 +25,6 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
 class StoreRebuildTest {
-    private static final int FLIPS = Integer.getInteger("bedmark.index.flips", 24);
-
     @TempDir
     Path folder;
 
@@ -180,26 +178,6 @@ class StoreRebuildTest {
         assertEquals(18, Store.rebuild(folder, quick()));
         assertTrue(Store.check(folder, new QuickLayer(), Progress.NONE).sound());
         assertAnswersAre(asked);
-    }
-
-    @Test
-    void noFlippedBitOfTheDatabaseIsTakenForAnAnswer() throws IOException {
-        Asked asked = walked();
-        byte[] whole = Files.readAllBytes(database());
-        Random random = new Random(11);
-        for (int i = 0; i < FLIPS; i++) {
-            byte[] flipped = whole.clone();
-            int at = random.nextInt(whole.length);
-            flipped[at] ^= (byte) (1 << random.nextInt(8));
-            Files.write(database(), flipped);
-            try (Store store = Store.open(folder, quick())) {
-                boolean proved = store.check(Progress.NONE).indexEqual();
-                Asked answers = Asked.of(store);
-                assertTrue(!proved || answers.equals(asked), "byte " + at);
-            }
-            Store.rebuild(folder, quick());
-            assertAnswersAre(asked);
-        }
     }
 
     @Test

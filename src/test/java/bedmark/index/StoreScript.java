@@ -3,12 +3,15 @@ package bedmark.index;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
+import bedmark.journal.QuickLayer;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import bedmark.survey.Act;
 import bedmark.survey.Survey;
+import bedmark.vault.Passphrase;
 import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Duration;
 import java.time.Instant;
@@ -24,6 +27,9 @@ final class StoreScript {
     static final String PERSON = "R. Okafor";
     static final String ROUND = "round-1";
     static final OffsetDateTime NOON = OffsetDateTime.parse("2026-03-01T12:00:00Z");
+    static final Passphrase SECRET = Passphrase.chosen("skirt and board");
+    /** Enough rounds for tests, which guess no passphrases. */
+    static final int FEW = 1000;
     static final byte[] PHOTO = photo("a heap of coal");
 
     private StoreScript() {
@@ -54,6 +60,19 @@ final class StoreScript {
         return StoreOptions.of("tablet 7").withClock(new TickingClock())
                 .withLevels((survey, register) -> "level " + survey.branch("readings").orElse(Branch.EMPTY).members()
                         .size() + " of " + register.branch("plant").flatMap(plant -> plant.text("name")).orElse("-"));
+    }
+
+    /** The same for a store that is sealed. */
+    static StoreOptions options(boolean sealed) {
+        return sealed ? options().withPassphrase(Optional.of(SECRET)) : options();
+    }
+
+    /** An empty store that is sealed, where that is wanted. */
+    static Path home(Path folder, boolean sealed) {
+        if (sealed) {
+            new StoreFolder(folder, options().withFiles(new QuickLayer()), FEW).seal(SECRET);
+        }
+        return folder;
     }
 
     static byte[] photo(String content) {

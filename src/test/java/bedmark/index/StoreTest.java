@@ -170,6 +170,29 @@ class StoreTest {
     }
 
     @Test
+    void theLastProposalOfAPointStandsUntilItIsWithdrawn() {
+        Branch first = Branch.EMPTY.with("tag", "TP-7a");
+        store.append(PERSON, new Act.PointProposed(id(1), first));
+        store.append(PERSON, new Act.PointProposed(id(2), Branch.EMPTY.with("tag", "TP-9a")));
+        store.append(PERSON, new Act.PointProposed(id(1), first.with("note", "behind the screen")));
+        assertEquals(List.of("TP-7a", "TP-9a"), store.proposals().stream()
+                .map(proposal -> proposal.text("tag").orElseThrow()).toList());
+        assertEquals("behind the screen", store.proposals().get(0).text("note").orElseThrow());
+        store.append(PERSON, new Act.PointProposed(id(1), Branch.EMPTY));
+        assertEquals(1, store.proposals().size());
+        assertTrue(store.check(Progress.NONE).sound());
+    }
+
+    @Test
+    void theDeviceKeepsItsIdentityUnderANewName() {
+        Device before = store.device();
+        store.nameDevice("Tablet 4");
+        assertEquals(new Device(before.id(), "Tablet 4"), store.device());
+        openAgain();
+        assertEquals(new Device(before.id(), "Tablet 4"), store.device());
+    }
+
+    @Test
     void impossibleActsAreRefusedAndNothingIsWritten() {
         store.append(PERSON, opened(id(1), "T1"));
         refused("survey-known", opened(id(1), "T1"));

@@ -4,6 +4,7 @@ import bedmark.document.Node;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import java.nio.file.Path;
+import java.util.Optional;
 import java.util.UUID;
 
 /** A program of its own that types and saves until it is killed, and tells of every saved entry. */
@@ -11,9 +12,11 @@ final class TypingChild {
     private TypingChild() {
     }
 
-    /** @param arguments the store's folder and a word that no other child uses */
+    /** @param arguments the store's folder, a word that no other child uses, and whether the store is sealed */
     public static void main(String[] arguments) {
-        try (Store store = Store.open(Path.of(arguments[0]), StoreOptions.of("tablet").withSegmentBytes(8192))) {
+        try (Store store = Store.open(Path.of(arguments[0]), StoreOptions.of("tablet").withSegmentBytes(8192)
+                .withPassphrase(Boolean.parseBoolean(arguments[2]) ? Optional.of(StoreScript.SECRET)
+                        : Optional.empty()))) {
             say("open");
             for (int i = 0; ; i++) {
                 UUID survey = UUID.randomUUID();

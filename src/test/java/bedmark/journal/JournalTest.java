@@ -228,7 +228,7 @@ class JournalTest {
         Frame frame = Frame.decode(old).orElseThrow();
         byte[] payload = frame.payload().clone();
         payload[new String(payload, StandardCharsets.ISO_8859_1).indexOf("note 3")] = 'x';
-        Frame forged = new Frame(Frame.Kind.ENTRY, 3, frame.previous(), payload);
+        Frame forged = new Frame(Frame.Kind.ENTRY, Frame.Form.PLAIN, 3, frame.previous(), payload);
         forged.encode().get(whole, (int) third.offset(), third.length());
         Files.write(segment, whole);
         Read read = new Read();
@@ -293,7 +293,7 @@ class JournalTest {
         write(folder, 1);
         Path segment = SegmentFile.path(folder, 1);
         byte[] bytes = Files.readAllBytes(segment);
-        bytes[11] = 2;
+        bytes[11] = 3;
         CRC32C crc = new CRC32C();
         crc.update(bytes, 0, 76);
         ByteBuffer.wrap(bytes).putInt(76, (int) crc.getValue());

@@ -7,6 +7,7 @@ import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
+import bedmark.survey.OfficeDeed;
 import java.time.OffsetDateTime;
 import java.util.List;
 import java.util.Optional;
@@ -31,11 +32,14 @@ class EntryCodecTest {
                 new Act.AnswerSet(SURVEY, Pointer.parse("/readings/beltSpeed"), Optional.of(SOMETHING)),
                 new Act.AnswerSet(SURVEY, Pointer.parse("/notes"), Optional.empty()),
                 new Act.AnswerUndone(SURVEY, 7), new Act.PhotoAttached(SURVEY, SOMETHING),
+                new Act.PhotoCaptioned(SURVEY, "p1", "left seal"), new Act.PhotoDetached(SURVEY, "p1"),
+                new Act.PointProposed(OTHER, SOMETHING), new Act.PointProposed(OTHER, Branch.EMPTY),
                 new Act.SurveyCompleted(SURVEY, "R. Okafor"),
                 new Act.SurveyCompleted(SURVEY, "", Optional.of(OffsetDateTime.parse("2026-03-01T08:52:10+01:00"))),
+                new Act.OfficeActed(new OfficeDeed.DeviceTrusted("ab12", "tablet 3")),
                 new Act.SurveysQueued(List.of(SURVEY, OTHER)),
                 new Act.PackExported(List.of(SURVEY), "a.zip", "00ff", "/somewhere"),
-                new Act.ReceiptNoted(List.of(OTHER), SOMETHING));
+                new Act.BackupMade("/stick", 12, "00ff"), new Act.ReceiptNoted(List.of(OTHER), SOMETHING));
     }
 
     @ParameterizedTest

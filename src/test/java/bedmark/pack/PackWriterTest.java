@@ -118,7 +118,7 @@ class PackWriterTest {
     void aSourceMayFindPhotosByTheirDigest() {
         String digest = Sha256.hex(BagForge.PHOTO);
         PackWriter.write(Samples.bundle(Map.of("c.png", BagForge.PHOTO)), (name, sha256) -> sha256.equals(digest)
-                ? Optional.of(folder.resolve("photos/a.png")) : Optional.empty(), key, out, Progress.NONE);
+                ? Optional.of(PhotoSource.file(folder.resolve("photos/a.png"))) : Optional.empty(), key, out, Progress.NONE);
         assertEquals("c.png", PackReader.open(out, PackLimits.STANDARD).photos().get(0).name());
     }
 

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import java.time.OffsetDateTime;
@@ -109,6 +110,41 @@ class SurveyHistoryTest {
         act(new Act.PackExported(List.of(ID), "p.zip", "00", "folder"));
         assertEquals(QueueState.EXPORTED, now().state());
         act(new Act.SurveysQueued(List.of(ID)));
+        assertThrows(IllegalStateException.class, this::now);
+    }
+
+    private void attach(String photo) {
+        act(new Act.PhotoAttached(ID, Branch.EMPTY.with("id", photo).with("file", photo + ".jpg")));
+    }
+
+    @Test
+    void photosAreCaptionedAndTakenOffAndNoUndoBringsThemBack() {
+        open();
+        set(NOTES, "before");
+        attach("p1");
+        attach("p2");
+        act(new Act.PhotoCaptioned(ID, "p1", "left seal"));
+        act(new Act.PhotoDetached(ID, "p2"));
+        act(new Act.AnswerUndone(ID, 2));
+        assertEquals(List.of(Branch.EMPTY.with("id", "p1").with("file", "p1.jpg").with("caption", "left seal")),
+                now().survey().photos());
+        act(new Act.PhotoCaptioned(ID, "p1", " "));
+        assertEquals(Optional.empty(), now().survey().photos().get(0).text("caption"));
+    }
+
+    @Test
+    void aPhotoThatIsNotThereIsNeitherCaptionedNorTakenOff() {
+        open();
+        attach("p1");
+        int sound = entries.size();
+        act(new Act.PhotoCaptioned(ID, "p2", "what"));
+        assertThrows(IllegalStateException.class, this::now);
+        entries.subList(sound, entries.size()).clear();
+        act(new Act.PhotoDetached(ID, "p2"));
+        assertThrows(IllegalStateException.class, this::now);
+        entries.subList(sound, entries.size()).clear();
+        act(new Act.SurveyCompleted(ID, "A. Person"));
+        act(new Act.PhotoDetached(ID, "p1"));
         assertThrows(IllegalStateException.class, this::now);
     }
 

@@ -124,7 +124,10 @@ public final class Profile {
         return integral(Segment.SQUARE, change) / length.value();
     }
 
-    /** The greatest depth at the board (m). */
+    /**
+     * The greatest depth at the board (m), with the derivatives of the station where it lies; of several alike those of
+     * the last. That one of several may turn out the deepest is not in them: see {@link #isContested}.
+     */
     public Uncertain deepest() {
         Uncertain most = Uncertain.ZERO;
         for (Uncertain level : levels) {
@@ -193,6 +196,38 @@ public final class Profile {
                     + runAfter * (i == last ? 2 : 1) * mean.slope(level, after);
         }
         return Uncertain.composed(value, numbers, slopes);
+    }
+
+    /**
+     * ∫h² dx (m³) of plain numbers.
+     *
+     * @param positions ascending within 0…length
+     */
+    public static double integralOfSquare(double length, double[] positions, double[] levels) {
+        int last = levels.length - 1;
+        double sum = positions[0] * Segment.SQUARE.of(levels[0], levels[0]);
+        for (int i = 1; i <= last; i++) {
+            sum += (positions[i] - positions[i - 1]) * Segment.SQUARE.of(levels[i - 1], levels[i]);
+        }
+        return sum + (length - positions[last]) * Segment.SQUARE.of(levels[last], levels[last]);
+    }
+
+    /**
+     * Whether a second station is so nearly as deep as the deepest that either may be, within twice the uncertainties
+     * of the two.
+     */
+    public boolean isContested(double[] uncertainties) {
+        int deepest = 0;
+        for (int i = 1; i < levels.length; i++) {
+            deepest = levels[i].value() > levels[deepest].value() ? i : deepest;
+        }
+        for (int i = 0; i < levels.length; i++) {
+            double apart = levels[deepest].value() - levels[i].value();
+            if (i != deepest && apart < 2 * Math.hypot(uncertainties[i], uncertainties[deepest])) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private double integral(Segment.Mean mean, DoubleUnaryOperator change) {

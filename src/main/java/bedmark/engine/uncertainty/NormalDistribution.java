@@ -47,9 +47,43 @@ public final class NormalDistribution {
         return high;
     }
 
+    /**
+     * The middles of equally likely strata, in standard deviations and ascending: of the n-th part of the probability
+     * each lies in the middle.
+     *
+     * @param number of strata, at least one
+     */
+    public static double[] strata(int number) {
+        double[] scores = new double[number];
+        double score = 0;
+        for (int i = number / 2; i < number; i++) {
+            score = quantileNear((i + 0.5) / number, score);
+            scores[i] = score;
+            scores[number - 1 - i] = -score;
+        }
+        return scores;
+    }
+
+    /**
+     * The score under which that probability lies, by Newton's method from a lesser score that is not negative: there
+     * the distribution function is concave, so that it comes nearer from below with every step.
+     */
+    private static double quantileNear(double probability, double start) {
+        double score = start;
+        for (double step = 1; step > 1e-9;) {
+            step = (probability - beyond(score, 1)) / (DENSITY_AT_ZERO * Math.exp(-0.5 * score * score));
+            score += step;
+        }
+        return score;
+    }
+
+    /** @throws IllegalArgumentException where one of them is no number, over which no probability can be told */
     private static double beyond(double excess, double uncertainty) {
+        if (Double.isNaN(excess) || Double.isNaN(uncertainty)) {
+            throw new IllegalArgumentException("no number");
+        }
         double z = excess / uncertainty;
-        if (uncertainty == 0 || Math.abs(z) > CERTAIN) {
+        if (uncertainty == 0 || !(Math.abs(z) <= CERTAIN)) {
             return excess > 0 ? 1 : 0;
         }
         return Math.min(1, Math.max(0, 0.5 + DENSITY_AT_ZERO * Math.exp(-0.5 * z * z) * series(z)));

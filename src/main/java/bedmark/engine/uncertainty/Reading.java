@@ -23,6 +23,11 @@ public record Reading(String name, double value, double standardUncertainty) {
         }
     }
 
+    /** The value with its standard uncertainty. */
+    public Estimate estimate() {
+        return new Estimate(value, standardUncertainty);
+    }
+
     /** A number without uncertainty: a target, a nameplate, a count. */
     public static Reading exact(String name, double value) {
         return new Reading(name, value, 0);

@@ -14,7 +14,16 @@ public record Chance(OptionalDouble near, OptionalDouble overloaded, double stan
 
     /** The chance from what was observed in every trial. */
     public static Chance of(Rule rule, double[] observed, Limit limit) {
-        return new Chance(share(rule, observed, limit.near()), share(rule, observed, limit.overloaded()),
+        return of(rule, observed, limit.near(), limit.overloaded());
+    }
+
+    /** The same by the limits of a finding. */
+    public static Chance of(Finding finding, double[] observed) {
+        return of(finding.rule(), observed, finding.near(), finding.overloaded());
+    }
+
+    private static Chance of(Rule rule, double[] observed, OptionalDouble near, OptionalDouble overloaded) {
+        return new Chance(share(rule, observed, near), share(rule, observed, overloaded),
                 Distribution.of(observed).standardDeviation());
     }
 

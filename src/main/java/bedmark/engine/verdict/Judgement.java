@@ -7,7 +7,9 @@ import java.util.OptionalDouble;
 
 /** Judges what was observed by the limits of its rule. */
 public final class Judgement {
-    private static final double BY_THE_THRESHOLD = 0.1;
+    private static final double BY_THE_THRESHOLD = 0.2;
+    /** Of the probability at which the level changes. */
+    private static final double MARGIN = 0.25;
 
     private Judgement() {
     }
@@ -43,7 +45,7 @@ public final class Judgement {
     public static boolean isDoubtful(Finding finding, Certainty certainty) {
         double over = finding.probabilityOverloaded().orElse(0);
         double near = finding.probabilityNear().orElse(0);
-        return over > certainty.undecided() / 2 && over < (1 + certainty.overloaded()) / 2
+        return over > MARGIN * certainty.undecided() && over < 1 - MARGIN * (1 - certainty.overloaded())
                 || Math.abs(near - certainty.near()) < BY_THE_THRESHOLD;
     }
 

@@ -21,19 +21,20 @@ import javafx.scene.layout.StackPane;
 
 /**
  * The keys of the pad, as wide and high as there is room: five across and four down, or seven across and three down
- * where the tablet stands upright.
+ * where the tablet stands upright. Quarters belong to lengths and a sign to what can lie below zero: one place serves
+ * both.
  */
 public final class NumericPad extends StackPane {
     private static final List<List<PadKey>> ROWS = List.of(
             List.of(PadKey.DIGIT_7, PadKey.DIGIT_8, PadKey.DIGIT_9, PadKey.STEP_DOWN, PadKey.BACKSPACE),
             List.of(PadKey.DIGIT_4, PadKey.DIGIT_5, PadKey.DIGIT_6, PadKey.STEP_UP, PadKey.UNIT),
             List.of(PadKey.DIGIT_1, PadKey.DIGIT_2, PadKey.DIGIT_3, PadKey.FRACTION, PadKey.BACK),
-            List.of(PadKey.DIGIT_0, PadKey.DECIMAL, PadKey.SIGN, PadKey.UNDO, PadKey.NEXT));
+            List.of(PadKey.DIGIT_0, PadKey.DECIMAL, PadKey.HISTORY, PadKey.UNDO, PadKey.NEXT));
 
     private static final List<List<PadKey>> FLAT = List.of(
             List.of(PadKey.DIGIT_7, PadKey.DIGIT_8, PadKey.DIGIT_9, PadKey.STEP_DOWN, PadKey.STEP_UP, PadKey.UNIT,
                     PadKey.BACKSPACE),
-            List.of(PadKey.DIGIT_4, PadKey.DIGIT_5, PadKey.DIGIT_6, PadKey.FRACTION, PadKey.SIGN, PadKey.UNDO,
+            List.of(PadKey.DIGIT_4, PadKey.DIGIT_5, PadKey.DIGIT_6, PadKey.FRACTION, PadKey.HISTORY, PadKey.UNDO,
                     PadKey.BACK),
             List.of(PadKey.DIGIT_1, PadKey.DIGIT_2, PadKey.DIGIT_3, PadKey.DIGIT_0, PadKey.DECIMAL, PadKey.NEXT));
 
@@ -74,8 +75,11 @@ public final class NumericPad extends StackPane {
         for (int row = 0; row < rows.size(); row++) {
             List<PadKey> line = rows.get(row);
             for (int column = 0; column < line.size(); column++) {
-                grid.add(keys.get(line.get(column)), column, row,
-                        column == line.size() - 1 ? across - column : 1, 1);
+                int span = column == line.size() - 1 ? across - column : 1;
+                grid.add(keys.get(line.get(column)), column, row, span, 1);
+                if (line.get(column) == PadKey.FRACTION) {
+                    grid.add(keys.get(PadKey.SIGN), column, row, span, 1);
+                }
             }
             RowConstraints equal = new RowConstraints();
             equal.setPercentHeight(100.0 / rows.size());
@@ -96,8 +100,8 @@ public final class NumericPad extends StackPane {
         button.setFocusTraversable(false);
         button.setMaxSize(Double.MAX_VALUE, Double.MAX_VALUE);
         button.setOnAction(event -> model.press(key));
-        if (key == PadKey.BACKSPACE) {
-            button.setGraphic(new IconView(Icon.BACKSPACE));
+        if (key == PadKey.BACKSPACE || key == PadKey.HISTORY) {
+            button.setGraphic(new IconView(key == PadKey.HISTORY ? Icon.HISTORY : Icon.BACKSPACE));
             button.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
         }
         if (key == PadKey.NEXT) {
@@ -128,6 +132,9 @@ public final class NumericPad extends StackPane {
             button.setAccessibleText(name(key, face));
             button.setDisable(!model.offers(key) || key == PadKey.UNDO && !undo);
         });
+        boolean sign = model.offers(PadKey.SIGN) && !model.offers(PadKey.FRACTION);
+        keys.get(PadKey.SIGN).setVisible(sign);
+        keys.get(PadKey.FRACTION).setVisible(!sign);
     }
 
     private String face(PadKey key, Optional<PadSetup> setup) {
@@ -138,7 +145,7 @@ public final class NumericPad extends StackPane {
             case STEP_DOWN -> setup.flatMap(PadSetup::steps).map(PadSetup.Steps::down).orElse("");
             case STEP_UP -> setup.flatMap(PadSetup::steps).map(PadSetup.Steps::up).orElse("");
             case UNIT -> setup.flatMap(PadSetup::units).orElse("");
-            case BACKSPACE -> "";
+            case BACKSPACE, HISTORY -> "";
             case UNDO -> words.undo();
             case BACK -> words.back();
             case NEXT -> words.next();
@@ -152,6 +159,7 @@ public final class NumericPad extends StackPane {
             case FRACTION -> words.fraction();
             case SIGN -> words.sign();
             case BACKSPACE -> words.backspace();
+            case HISTORY -> words.history();
             default -> face;
         };
     }

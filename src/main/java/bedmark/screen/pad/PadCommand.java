@@ -33,6 +33,10 @@ public sealed interface PadCommand {
     record Undone() implements PadCommand {
     }
 
+    /** What happened to the field so far. */
+    record HistoryAsked() implements PadCommand {
+    }
+
     /** The field before. */
     record WentBack() implements PadCommand {
     }

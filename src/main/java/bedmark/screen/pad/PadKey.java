@@ -15,6 +15,8 @@ public enum PadKey {
     STEP_UP,
     UNIT,
     BACKSPACE,
+    /** What happened to the field so far. */
+    HISTORY,
     UNDO,
     BACK,
     NEXT;

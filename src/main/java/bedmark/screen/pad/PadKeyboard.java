@@ -22,7 +22,7 @@ public final class PadKeyboard {
     /**
      * Listens to what is typed in the form, wherever the focus is, but for fields that take text themselves: digits,
      * point and comma, {@code /} for the quarters, {@code -} for the sign, U for the unit, the arrows for the steps,
-     * Enter for the next field and Shift-Enter for the one before, Control-Z for the last entry back. Tab stays the
+     * Enter for the next field and Shift-Enter for the one before, Control-Z for the last entry back, H for the history. Tab stays the
      * way from control to control.
      */
     public static void listen(Node form, PadModel model) {
@@ -68,6 +68,7 @@ public final class PadKeyboard {
         return switch (sign) {
             case '/' -> Optional.of(PadKey.FRACTION);
             case '-' -> Optional.of(PadKey.SIGN);
+            case 'h' -> Optional.of(PadKey.HISTORY);
             case 'u' -> Optional.of(PadKey.UNIT);
             default -> Optional.empty();
         };

@@ -31,11 +31,20 @@ public final class PadModel {
         this.commands = Objects.requireNonNull(commands);
     }
 
-    /** Takes a field in hand. */
+    /** Takes a field in hand whose number nobody has begun to change. */
     public void open(PadSetup field, String current) {
+        open(field, current, true);
+    }
+
+    /**
+     * Takes a field in hand.
+     *
+     * @param untouched false where the person is in the middle of the number: the next digit then goes on with it
+     */
+    public void open(PadSetup field, String current, boolean untouched) {
         setup.set(Optional.of(field));
         text.set(current);
-        fresh.set(true);
+        fresh.set(untouched);
         note.set(Optional.empty());
     }
 
@@ -68,6 +77,7 @@ public final class PadModel {
             case STEP_DOWN -> commands.accept(new PadCommand.Stepped(-1));
             case STEP_UP -> commands.accept(new PadCommand.Stepped(1));
             case UNIT -> commands.accept(new PadCommand.UnitSwitched());
+            case HISTORY -> commands.accept(new PadCommand.HistoryAsked());
             case UNDO -> commands.accept(new PadCommand.Undone());
             case BACK -> commands.accept(new PadCommand.WentBack());
             case NEXT -> commands.accept(new PadCommand.WentOn());

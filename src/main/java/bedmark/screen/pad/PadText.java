@@ -3,7 +3,7 @@ package bedmark.screen.pad;
 import java.util.List;
 
 /** The text of a number under the keys of the pad: what each key makes of it, or why it is refused. */
-final class PadText {
+public final class PadText {
     /** Signs that a number on the pad can have; no reading needs more. */
     static final int LONGEST = 12;
 
@@ -65,7 +65,7 @@ final class PadText {
     }
 
     /** The text as it is shown: fractions as one sign, a real minus. */
-    static String shown(String text) {
+    public static String shown(String text) {
         String shown = text.replace("-", "\u2212");
         for (int i = 0; i < QUARTERS.size(); i++) {
             String sign = String.valueOf("¼½¾".charAt(i));

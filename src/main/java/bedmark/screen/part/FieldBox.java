@@ -21,6 +21,7 @@ import javafx.scene.layout.VBox;
  */
 public final class FieldBox extends HBox {
     private static final PseudoClass ACTIVE = PseudoClass.getPseudoClass("active");
+    private static final PseudoClass CARRIED = PseudoClass.getPseudoClass("carried");
     private static final PseudoClass FRESH = PseudoClass.getPseudoClass("fresh");
     static final PseudoClass QUESTIONED = PseudoClass.getPseudoClass("questioned");
     static final PseudoClass WRONG = PseudoClass.getPseudoClass("wrong");
@@ -32,6 +33,7 @@ public final class FieldBox extends HBox {
     private final Label unit = Labels.label("unit");
     private final Label ghost = Labels.label("ghost");
     private final BooleanProperty active = new SimpleBooleanProperty(this, "active");
+    private final BooleanProperty carried = new SimpleBooleanProperty(this, "carried");
     private final BooleanProperty fresh = new SimpleBooleanProperty(this, "fresh");
     private final ObjectProperty<Judgement> judgement =
             new SimpleObjectProperty<>(this, "judgement", Judgement.NONE);
@@ -71,6 +73,7 @@ public final class FieldBox extends HBox {
         value.managedProperty().bind(value.textProperty().isNotEmpty());
         unit.setMinWidth(Region.USE_PREF_SIZE);
         active.subscribe(on -> pseudoClassStateChanged(ACTIVE, on));
+        carried.subscribe(on -> pseudoClassStateChanged(CARRIED, on));
         fresh.subscribe(on -> pseudoClassStateChanged(FRESH, on));
         judgement.subscribe(judged -> {
             pseudoClassStateChanged(QUESTIONED, judged == Judgement.QUESTIONED);
@@ -137,6 +140,11 @@ public final class FieldBox extends HBox {
     /** Whether the next digit takes the place of the whole value. */
     public BooleanProperty freshProperty() {
         return fresh;
+    }
+
+    /** Whether the value was taken over from the last survey and not read since. */
+    public BooleanProperty carriedProperty() {
+        return carried;
     }
 
     public ObjectProperty<Judgement> judgementProperty() {

@@ -9,6 +9,7 @@ import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
 import bedmark.screen.part.SectionHeader;
+import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
 import bedmark.screen.round.RoundModel;
 import bedmark.screen.theme.Icon;
@@ -23,18 +24,20 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.function.Consumer;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ProgressBar;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
-import javafx.scene.layout.Region;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
-/** The way to the office: completed surveys into the queue, the queue into a folder or onto a stick, the receipt. */
+/** The way to the office: surveys into the queue, the queue onto a stick, the office's receipts back. */
 public final class QueueView extends SidedScreen {
     private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm");
+    private static final int EXPORTS_SHOWN = 6;
 
     private static final List<LevelShape> WORST_FIRST = List.of(LevelShape.OVERLOADED, LevelShape.UNDECIDED,
             LevelShape.INCOMPLETE, LevelShape.NEAR, LevelShape.WITHIN, LevelShape.NOT_INSPECTED);
@@ -43,6 +46,8 @@ public final class QueueView extends SidedScreen {
     private final QueueModel model;
     private final Wording wording;
     private final VBox steps = new VBox();
+    private final VBox outcome = new VBox();
+    private final ScrollPane sideScroll = scrolling(outcome);
     private final ProgressBar bar = new ProgressBar(0);
 
     public QueueView(Workplace workplace, QueueModel model, RoundModel round, Navigator navigator) {
@@ -53,18 +58,27 @@ public final class QueueView extends SidedScreen {
         ActionButton back = ActionButton.with(Icon.BACK, ContentDisplay.LEFT, Weight.QUIET,
                 wording.text("screen.round.title"), () -> navigator.toRound(round));
         back.setId("foot-back");
+        ActionButton store = new ActionButton(Weight.PLAIN, wording.text("queue.to-store"),
+                () -> navigator.toStore(() -> navigator.toQueue(round)));
+        store.setId("to-store");
         frame(Heads.head(workplace, listening, wording.text("screen.queue.title"), round.round().name()),
-                new FootBar(Optional.of(back), Optional.empty(), Optional.empty()));
+                new FootBar(Optional.of(back), Optional.empty(), Optional.of(store)));
         steps.getStyleClass().add("questions");
+        outcome.getStyleClass().add("questions-inside");
         side.getStyleClass().add("summary");
+        side.getChildren().add(sideScroll);
+        VBox.setVgrow(sideScroll, Priority.ALWAYS);
         bar.setMaxWidth(Double.MAX_VALUE);
+        bar.setAccessibleText(wording.text("screen.queue.exporting"));
         body.getStyleClass().add("queue-body");
         body.setCenter(scrolling(steps));
         listening.onChange(model.completedProperty(), lines -> layOut());
         listening.onChange(model.queuedProperty(), lines -> layOut());
-        listening.onChange(model.progressProperty(), share -> progress(share.doubleValue()));
-        listening.onChange(model.receiptProperty(), receipt -> showOutcome());
-        listening.onChange(model.troubleProperty(), trouble -> showOutcome());
+        listening.onChange(model.awaitedProperty(), lines -> layOut());
+        listening.onChange(model.errand().progressProperty(), share -> progress(share.doubleValue()));
+        listening.onChange(model.errand().troubleProperty(), trouble -> showOutcome());
+        listening.onChange(model.leftProperty(), left -> showOutcome());
+        listening.onChange(model.receipts().resultProperty(), result -> showOutcome());
         listening.onChange(model.exportsProperty(), exports -> showOutcome());
         layOut();
         showOutcome();
@@ -75,6 +89,18 @@ public final class QueueView extends SidedScreen {
         scroll.setFitToWidth(true);
         scroll.getStyleClass().add("form-scroll");
         return scroll;
+    }
+
+    /** Upright, what came out takes at most the lower half, and scrolls in it. */
+    @Override
+    public void turned(boolean portrait) {
+        super.turned(portrait);
+        sideScroll.maxHeightProperty().unbind();
+        if (portrait) {
+            sideScroll.maxHeightProperty().bind(body.heightProperty().multiply(0.5));
+        } else {
+            sideScroll.setMaxHeight(Double.MAX_VALUE);
+        }
     }
 
     private void progress(double share) {
@@ -88,22 +114,30 @@ public final class QueueView extends SidedScreen {
     private void layOut() {
         List<SurveyLine> completed = model.completedProperty().get();
         List<SurveyLine> queued = model.queuedProperty().get();
+        List<SurveyLine> awaited = model.awaitedProperty().get();
+        boolean running = model.errand().running();
         steps.getChildren().setAll(new SectionHeader(wording.text("screen.queue.completed")),
-                completed.isEmpty() ? wrapped(wording.text("screen.queue.none-completed")) : tags(completed));
+                completed.isEmpty() ? Texts.wrapped(wording.text("screen.queue.none-completed")) : tags(completed));
         if (!completed.isEmpty()) {
             steps.getChildren().add(button("queue-all", Weight.PRIMARY,
                     wording.text("screen.queue.queue-all", completed.size()), model::queueAll));
         }
         steps.getChildren().addAll(new SectionHeader(wording.text("screen.queue.queued")),
-                queued.isEmpty() ? wrapped(wording.text("screen.queue.none-queued")) : tags(queued));
-        if (model.progressProperty().get() >= 0) {
-            steps.getChildren().addAll(wrapped(wording.text("screen.queue.exporting")), bar,
-                    button("cancel-export", Weight.PLAIN, wording.text("screen.cancel"), model::cancel));
+                queued.isEmpty() ? Texts.wrapped(wording.text("screen.queue.none-queued")) : tags(queued));
+        if (running) {
+            steps.getChildren().addAll(Texts.wrapped(wording.text("screen.queue.exporting")), bar,
+                    button("cancel-export", Weight.PLAIN, wording.text("screen.cancel"), model.errand()::cancel));
         } else if (!queued.isEmpty()) {
             steps.getChildren().add(button("export", Weight.PRIMARY,
-                    wording.text("screen.queue.export", queued.size()), this::export));
+                    wording.text("screen.queue.export", queued.size()), () -> chosen(model::export)));
         }
-        steps.getChildren().add(wrapped(wording.text("screen.queue.not-deleted")));
+        steps.getChildren().addAll(new SectionHeader(wording.text("queue.awaited")),
+                Texts.wrapped(wording.text("queue.awaited-count", awaited.size())));
+        if (!running && !awaited.isEmpty()) {
+            steps.getChildren().add(button("read-receipts", Weight.PLAIN, wording.text("queue.read-receipts"),
+                    () -> chosen(model::readReceipts)));
+        }
+        steps.getChildren().add(Texts.wrapped(wording.text("screen.queue.not-deleted")));
     }
 
     private ActionButton button(String id, Weight weight, String text, Runnable action) {
@@ -137,54 +171,54 @@ public final class QueueView extends SidedScreen {
                 : LevelShape.valueOf(line.level().toUpperCase(Locale.ROOT).replace('-', '_'));
     }
 
-    private void export() {
+    private void chosen(Consumer<Path> then) {
         workplace.folderChoice().choose(wording.text("screen.queue.choose-folder"),
-                workplace.preferences().exportFolder().map(Path::of)).ifPresent(model::export);
+                workplace.preferences().exportFolder().map(Path::of)).ifPresent(then);
     }
 
     private void showOutcome() {
-        side.getChildren().clear();
-        model.troubleProperty().get().ifPresent(defect -> {
-            Label trouble = wrapped(wording.sentence(defect));
-            trouble.getStyleClass().add("trouble-text");
+        outcome.getChildren().clear();
+        model.errand().troubleProperty().get().ifPresent(defect -> {
+            Label trouble = Texts.trouble(wording.sentence(defect));
             trouble.setId("trouble");
-            side.getChildren().addAll(new SectionHeader(wording.text("screen.queue.failed")), trouble);
+            outcome.getChildren().addAll(new SectionHeader(wording.text("queue.failed")), trouble);
         });
-        model.receiptProperty().get().ifPresent(this::showReceipt);
-        side.getChildren().add(new SectionHeader(wording.text("screen.queue.left")));
+        model.leftProperty().get().ifPresent(this::showLeft);
+        model.receipts().resultProperty().get().ifPresent(result -> outcome.getChildren().add(
+                new ReceiptsPane(wording, result, model.receipts(), model::reload)));
+        outcome.getChildren().add(new SectionHeader(wording.text("screen.queue.left")));
         List<Export> exports = model.exportsProperty().get();
         if (exports.isEmpty()) {
-            side.getChildren().add(wrapped(wording.text("screen.queue.none-left")));
+            outcome.getChildren().add(Texts.wrapped(wording.text("screen.queue.none-left")));
         }
-        exports.stream().limit(6).forEach(export -> side.getChildren().add(wrapped(
-                wording.text("screen.queue.export-line", TIME.format(export.at()), export.pack(),
-                        export.surveys().size(), export.folder()))));
+        exports.stream().limit(EXPORTS_SHOWN).forEach(this::showExport);
     }
 
-    private void showReceipt(QueueModel.Receipt receipt) {
-        Label done = wrapped(wording.text("screen.receipt.done", receipt.surveys()));
+    private void showExport(Export export) {
+        outcome.getChildren().add(Texts.wrapped(wording.text("screen.queue.export-line", TIME.format(export.at()),
+                export.pack(), export.surveys().size(), export.folder())));
+        ActionButton again = button("again-" + export.sequence(), Weight.QUIET, wording.text("queue.export-again"),
+                () -> chosen(folder -> model.exportAgain(export, folder)));
+        again.setAccessibleText(wording.text("queue.export-again-of", export.pack()));
+        again.getStyleClass().add("secondary-target");
+        outcome.getChildren().add(again);
+    }
+
+    private void showLeft(QueueModel.Left left) {
+        Label done = Texts.wrapped(wording.text("screen.receipt.done", left.surveys()));
         done.getStyleClass().add("card-title");
         done.setId("receipt");
         VBox box = new VBox(done,
-                line("screen.receipt.file", receipt.file().getFileName().toString()),
-                line("screen.receipt.folder", String.valueOf(receipt.file().getParent())),
-                line("screen.receipt.sha256", receipt.sha256()),
-                line("screen.receipt.key", receipt.fingerprint()),
-                line("screen.receipt.time", TIME.format(receipt.at())));
+                line("screen.receipt.file", left.file().getFileName().toString()),
+                line("screen.receipt.folder", String.valueOf(left.file().getParent())),
+                line("screen.receipt.sha256", left.sha256()),
+                line("screen.receipt.key", left.fingerprint()),
+                line("screen.receipt.time", TIME.format(left.at())));
         box.getStyleClass().add("receipt");
-        side.getChildren().add(box);
+        outcome.getChildren().add(box);
     }
 
     private VBox line(String key, String value) {
-        Label name = new Label(wording.text(key));
-        name.getStyleClass().add("caption");
-        return new VBox(name, wrapped(value));
-    }
-
-    private static Label wrapped(String text) {
-        Label label = new Label(text);
-        label.setWrapText(true);
-        label.setMinHeight(Region.USE_PREF_SIZE);
-        return label;
+        return Texts.named(wording.text(key), value);
     }
 }

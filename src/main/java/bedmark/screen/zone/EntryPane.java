@@ -2,8 +2,10 @@ package bedmark.screen.zone;
 
 import bedmark.document.Node;
 import bedmark.form.Choice;
+import bedmark.form.Count;
 import bedmark.form.Texts;
 import bedmark.quantity.BeltState;
+import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import bedmark.screen.Listening;
 import bedmark.screen.pad.NumericPad;
@@ -15,7 +17,9 @@ import bedmark.screen.pad.PadWords;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
+import bedmark.screen.theme.Icon;
 import bedmark.wording.Wording;
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -38,17 +42,23 @@ import javafx.scene.layout.VBox;
 /** Where the active cell is filled in: the pad for numbers, buttons for choices, the keyboard for words. */
 final class EntryPane extends StackPane {
     private static final int LONGEST_FACE = 7;
+    private static final BigDecimal QUARTER = new BigDecimal("0.25");
 
     private final ZoneModel model;
     private final Wording wording;
     private final PadModel pad = new PadModel(this::command);
     private final NumericPad numericPad;
+    private final Runnable history;
     private boolean editing;
     private boolean portrait;
+    /** Builds what is shown anew for the other way of holding the tablet; what is in the middle of being typed stays. */
+    private Runnable turn = () -> { };
 
-    EntryPane(ZoneModel model, Wording wording, Listening listening) {
+    /** @param history shows what happened to the active cell */
+    EntryPane(ZoneModel model, Wording wording, Listening listening, Runnable history) {
         this.model = model;
         this.wording = wording;
+        this.history = history;
         this.numericPad = new NumericPad(pad, words(wording), model.undoableProperty());
         getStyleClass().add("entry-pane");
         listening.to(model.inHandProperty(), inHand -> show(inHand.slot()));
@@ -97,23 +107,27 @@ final class EntryPane extends StackPane {
 
     private static PadWords words(Wording wording) {
         return new PadWords(wording.text("screen.pad.back"), wording.text("screen.pad.next"),
-                wording.text("screen.pad.undo"), wording.text("screen.pad.backspace"),
+                wording.text("zone.history"), wording.text("screen.pad.undo"), wording.text("screen.pad.backspace"),
                 wording.text("screen.pad.decimal"), wording.text("screen.pad.fraction"),
                 wording.text("screen.pad.sign"), note -> wording.text("screen.pad.note." + note.code()));
     }
 
     private void show(Slot slot) {
+        turn = () -> { };
         if (!model.open()) {
             pad.close();
             getChildren().clear();
         } else if (slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot) {
             getChildren().setAll(numericPad);
-            pad.open(setup(slot), model.editable());
+            pad.open(setup(slot), model.editable(), model.typedProperty().get().isEmpty());
+        } else if (slot instanceof Slot.TextSlot text && !SlotWords.isMaterial(slot)) {
+            pad.close();
+            getChildren().setAll(textPane(text));
+            focusText();
         } else {
             pad.close();
-            getChildren().setAll(slot instanceof Slot.TextSlot text && !SlotWords.isMaterial(slot)
-                    ? textPane(text) : choicePane(slot));
-            focusText();
+            getChildren().setAll(choicePane(slot));
+            turn = () -> show(slot);
         }
     }
 
@@ -122,7 +136,7 @@ final class EntryPane extends StackPane {
         if (portrait != upright) {
             portrait = upright;
             numericPad.turned(upright);
-            show(model.active());
+            turn.run();
         }
     }
 
@@ -154,20 +168,31 @@ final class EntryPane extends StackPane {
         }
         pad.close();
         getChildren().setAll(pane);
+        turn = this::askBeltState;
     }
 
     private PadSetup setup(Slot slot) {
         char sign = wording.format().decimalSign();
         if (slot instanceof Slot.MeasureSlot measured) {
             Unit unit = model.inHandProperty().get().unit().orElseThrow();
-            String step = wording.format().exact(measured.measure().step(unit));
+            BigDecimal size = measured.measure().step(unit);
+            String step = unit == Unit.INCH && size.compareTo(QUARTER) == 0 ? "\u00BC" : wording.format().exact(size);
             List<Unit> units = measured.measure().units();
-            return new PadSetup(sign, false, unit == Unit.INCH, Optional.of(new PadSetup.Steps("\u2212" + step,
-                    "+" + step)), units.size() < 2 ? Optional.empty() : Optional.of(unitFace(units, unit)));
+            boolean negative = canBeNegative(measured.measure().possible().low().map(Quantity::value));
+            return new PadSetup(sign, negative, unit == Unit.INCH && !negative, steps(step),
+                    units.size() < 2 ? Optional.empty() : Optional.of(unitFace(units, unit)));
         }
-        String step = wording.format().exact(((Slot.CountSlot) slot).count().step());
-        return new PadSetup(sign, false, false, Optional.of(new PadSetup.Steps("\u2212" + step, "+" + step)),
-                Optional.empty());
+        Count count = ((Slot.CountSlot) slot).count();
+        return new PadSetup(sign, canBeNegative(count.possible().low()), false,
+                steps(wording.format().exact(count.step())), Optional.empty());
+    }
+
+    private static boolean canBeNegative(Optional<BigDecimal> least) {
+        return least.map(number -> number.signum() < 0).orElse(true);
+    }
+
+    private static Optional<PadSetup.Steps> steps(String step) {
+        return Optional.of(new PadSetup.Steps("\u2212" + step, "+" + step));
     }
 
     /** All units where they fit on the key, else the one that it goes on to. */
@@ -189,6 +214,8 @@ final class EntryPane extends StackPane {
             model.step(stepped.direction());
         } else if (command instanceof PadCommand.UnitSwitched) {
             model.switchUnit();
+        } else if (command instanceof PadCommand.HistoryAsked) {
+            history.run();
         } else if (command instanceof PadCommand.Undone) {
             model.undo();
         } else if (command instanceof PadCommand.WentBack) {
@@ -274,6 +301,7 @@ final class EntryPane extends StackPane {
     private VBox textPane(Slot.TextSlot slot) {
         TextArea area = new TextArea(model.editable());
         area.setId("text-entry");
+        area.positionCaret(area.getLength());
         area.setWrapText(true);
         area.setAccessibleText(slot.label().in(wording.words().language()));
         area.textProperty().addListener((property, before, now) -> {
@@ -288,7 +316,11 @@ final class EntryPane extends StackPane {
         // A text of one line ends with Enter; in one of several lines Enter is a line end, and Tab leads on.
         area.addEventFilter(KeyEvent.KEY_PRESSED, event -> {
             boolean on = event.getCode() == KeyCode.TAB || event.getCode() == KeyCode.ENTER && !slot.field().lines();
-            if (on) {
+            if (on && event.getCode() == KeyCode.TAB && !event.isShiftDown() && model.atEnd()) {
+                // Behind the last cell Tab leads out of the form: a keyboard must never be caught in a text.
+                Optional.ofNullable(lookup("#entry-back")).ifPresent(javafx.scene.Node::requestFocus);
+                event.consume();
+            } else if (on) {
                 move(event.isShiftDown());
                 event.consume();
             }
@@ -299,7 +331,7 @@ final class EntryPane extends StackPane {
         return pane;
     }
 
-    /** Back, clear, undo and next, as on the pad. */
+    /** Back, clear, history, undo and next, as on the pad. */
     private HBox moves() {
         ActionButton next = new ActionButton(Weight.PRIMARY, wording.text("screen.pad.next"), model::next);
         next.setId("entry-next");
@@ -309,11 +341,14 @@ final class EntryPane extends StackPane {
         back.setId("entry-back");
         ActionButton clear = new ActionButton(Weight.PLAIN, wording.text("screen.pad.clear"), model::clear);
         clear.setId("entry-clear");
-        HBox moves = new HBox(back, clear, undo, next);
+        ActionButton past = ActionButton.of(Icon.HISTORY, Weight.PLAIN, wording.text("zone.history"), history);
+        past.setId("entry-history");
+        HBox moves = new HBox(back, clear, past, undo, next);
         moves.getStyleClass().add("moves");
         for (Button button : List.of(back, clear, undo, next)) {
             button.setMaxWidth(Double.MAX_VALUE);
             button.setPrefWidth(100);
+            button.setMinWidth(0);
             HBox.setHgrow(button, Priority.ALWAYS);
         }
         return moves;

@@ -1,31 +1,46 @@
 package bedmark.screen.zone;
 
-import bedmark.document.Pointer;
 import bedmark.form.Section;
 import bedmark.screen.Listening;
 import bedmark.screen.part.CautionStrip;
+import bedmark.screen.part.FieldBox;
 import bedmark.screen.part.SectionHeader;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import javafx.application.Platform;
+import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
-/** The form: the rows of all sections in one list, the active one always in sight, and the caution beside it. */
+/**
+ * The form: the rows of all sections in one list, the active one always in sight, and the caution beside it. Only the
+ * rows around the active one are built at once; the others follow a few at a time, so that a long form opens as fast as
+ * a short one.
+ */
 final class FormPane extends VBox {
+    private static final int AHEAD = 4;
+    private static final int AT_A_TIME = 4;
+
     private final ZoneModel model;
     private final Wording wording;
+    private final boolean large;
     private final VBox list = new VBox();
     private final ScrollPane scroll = new ScrollPane(list);
     private final SectionHeader header = new SectionHeader("");
     private final CautionStrip caution = new CautionStrip("");
-    private List<RowView> rows = List.of();
+    private final Label aside = new Label();
+    private List<RowPlace> rows = List.of();
+    private Optional<RowPlace> inHand = Optional.empty();
+    private boolean filling;
 
-    FormPane(ZoneModel model, Wording wording, Listening listening) {
+    /** @param large whether large keys take the room: one row is shown, and what is said of it stands elsewhere */
+    FormPane(ZoneModel model, Wording wording, Listening listening, boolean large) {
         this.model = model;
         this.wording = wording;
+        this.large = large;
         getStyleClass().add("form-pane");
         list.getStyleClass().add("rows");
         scroll.getStyleClass().add("form-scroll");
@@ -33,81 +48,120 @@ final class FormPane extends VBox {
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         scroll.setFocusTraversable(false);
         scroll.setMinHeight(0);
-        VBox.setVgrow(scroll, Priority.ALWAYS);
-        getChildren().addAll(header, scroll, caution);
+        aside.getStyleClass().addAll("message", "aside");
+        aside.setWrapText(true);
+        aside.setMinHeight(USE_PREF_SIZE);
+        aside.managedProperty().bind(aside.visibleProperty());
+        aside.visibleProperty().bind(aside.textProperty().isNotEmpty());
+        if (large) {
+            scroll.getStyleClass().add("one-row");
+            getChildren().addAll(header, scroll);
+        } else {
+            VBox.setVgrow(scroll, Priority.ALWAYS);
+            getChildren().addAll(header, scroll, caution);
+        }
         listening.to(model.rowsProperty(), this::layOut);
-        listening.onChange(model.surveyProperty(), survey -> update());
-        listening.onChange(model.typedProperty(), typed -> update());
-        listening.onChange(model.noteProperty(), note -> update());
+        listening.onChange(model.keptProperty(), kept -> rows.forEach(RowPlace::update));
+        listening.onChange(model.surveyProperty(), survey -> typed());
+        listening.onChange(model.typedProperty(), typed -> typed());
+        listening.onChange(model.noteProperty(), note -> typed());
         listening.onChange(model.beltStateProperty(), state -> sayCaution());
         listening.to(model.inHandProperty(), inHand -> activated());
     }
 
-    /** The caution, for whoever has a better place for it while there is no room here. */
-    CautionStrip caution() {
-        return caution;
-    }
-
-    /** Leaves the head and the caution out where large keys take the room, or takes them in again. */
-    void shrink(boolean small) {
-        if (small) {
-            getChildren().setAll(scroll);
-        } else {
-            getChildren().setAll(header, scroll, caution);
-        }
+    /** The caution and what is said of the active row, for whoever has a better place while there is no room here. */
+    List<javafx.scene.Node> elsewhere() {
+        return large ? List.of(caution, aside) : List.of();
     }
 
     private void layOut(List<SlotRow> wanted) {
-        List<Pointer> places = wanted.stream().map(SlotRow::place).toList();
-        if (places.equals(rows.stream().map(row -> row.row().place()).toList())
-                && wanted.equals(rows.stream().map(RowView::row).toList())) {
+        if (wanted.equals(rows.stream().map(RowPlace::row).toList())) {
             return;
         }
-        List<RowView> made = new ArrayList<>();
-        list.getChildren().clear();
+        List<RowPlace> made = new ArrayList<>();
+        List<javafx.scene.Node> lines = new ArrayList<>();
         Optional<Section> section = Optional.empty();
         for (SlotRow row : wanted) {
             if (!section.equals(Optional.of(row.section()))) {
                 section = Optional.of(row.section());
                 if (!made.isEmpty()) {
-                    list.getChildren().add(new SectionHeader(title(row.section())));
+                    lines.add(new SectionHeader(title(row.section())));
                 }
             }
-            RowView view = rows.stream().filter(known -> known.row().equals(row)).findFirst()
-                    .orElseGet(() -> new RowView(row, model, wording));
-            made.add(view);
-            list.getChildren().add(view);
+            RowPlace place = rows.stream().filter(known -> known.row().equals(row)).findFirst()
+                    .orElseGet(() -> new RowPlace(row, model, wording, large));
+            made.add(place);
+            lines.add(place);
         }
+        list.getChildren().setAll(lines);
         rows = made;
-        update();
         activated();
+        fill();
+    }
+
+    /** Builds the rows that are still to come, a few at a time, so that keys get their turn in between. */
+    private void fill() {
+        if (!filling) {
+            filling = true;
+            Platform.runLater(this::fillSome);
+        }
+    }
+
+    private void fillSome() {
+        filling = false;
+        List<RowPlace> next = rows.stream().filter(row -> !row.isBuilt()).limit(AT_A_TIME).toList();
+        next.forEach(RowPlace::build);
+        if (!next.isEmpty()) {
+            inHand.ifPresent(this::reveal);
+            fill();
+        }
     }
 
     private String title(Section section) {
         return section.title().in(wording.words().language());
     }
 
-    private void update() {
-        rows.forEach(RowView::update);
+    private void typed() {
+        active().ifPresent(row -> {
+            row.update();
+            say(row);
+        });
+    }
+
+    /** At glove size only what is wrong or doubtful is said beside the picture; how to read it is one tap away. */
+    private void say(RowPlace row) {
+        RowView.Said said = row.built().said();
+        aside.setText(said.tone().equals("help") ? "" : said.words());
     }
 
     private void activated() {
-        update();
-        active().ifPresent(row -> {
+        inHand.ifPresent(RowPlace::update);
+        inHand = active();
+        inHand.ifPresent(row -> {
+            int index = rows.indexOf(row);
+            rows.subList(Math.max(0, index - AHEAD / 2), Math.min(rows.size(), index + AHEAD))
+                    .forEach(RowPlace::build);
+            row.update();
+            say(row);
             header.titleProperty().set(title(row.row().section()));
-            header.asideProperty().set(wording.text("screen.zone.place", rows.indexOf(row) + 1, rows.size()));
-            row.focusActive();
+            header.asideProperty().set(wording.text("screen.zone.place", index + 1, rows.size()));
+            row.built().focusActive();
             reveal(row);
         });
         sayCaution();
     }
 
-    private Optional<RowView> active() {
-        return rows.stream().filter(RowView::holdsActive).findFirst();
+    private Optional<RowPlace> active() {
+        return rows.stream().filter(RowPlace::holdsActive).findFirst();
+    }
+
+    /** The box of the active cell. */
+    Optional<FieldBox> activeBox() {
+        return active().flatMap(row -> row.built().activeBox());
     }
 
     /** Brings the row in sight with the one before it where there is room for both; no row is cut at the top. */
-    private void reveal(RowView row) {
+    private void reveal(RowPlace row) {
         applyCss();
         layout();
         double room = scroll.getViewportBounds().getHeight();
@@ -118,8 +172,8 @@ final class FormPane extends VBox {
         int index = rows.indexOf(row);
         double wanted = row.getBoundsInParent().getMinY();
         if (row.getHeight() > room + 1) {
-            wanted = row.activeBox().map(box -> list.sceneToLocal(box.localToScene(box.getLayoutBounds())).getMinY())
-                    .orElse(wanted);
+            wanted = row.built().activeBox()
+                    .map(box -> list.sceneToLocal(box.localToScene(box.getLayoutBounds())).getMinY()).orElse(wanted);
         } else if (index > 0 && rows.get(index - 1).row().section().equals(row.row().section())) {
             double before = rows.get(index - 1).getBoundsInParent().getMinY();
             if (row.getBoundsInParent().getMaxY() - before <= room + 1) {
@@ -140,7 +194,9 @@ final class FormPane extends VBox {
 
     /** Puts the focus on the active box. */
     void focusActive() {
-        active().ifPresent(RowView::focusActive);
-        active().ifPresent(this::reveal);
+        active().ifPresent(row -> {
+            row.built().focusActive();
+            reveal(row);
+        });
     }
 }

@@ -6,19 +6,18 @@ import bedmark.form.StationsField;
 import bedmark.quantity.Quality;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
+import bedmark.screen.pad.PadText;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FieldBox;
 import bedmark.screen.part.Judgement;
 import bedmark.screen.part.QualityButton;
 import bedmark.screen.part.Weight;
-import bedmark.screen.theme.Icon;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
@@ -27,18 +26,25 @@ import javafx.scene.layout.VBox;
 
 /** One row of the form: its name, the boxes of its cells, the mark of its reading, and below it what is to be said. */
 final class RowView extends VBox {
+    private static final List<String> TONES = List.of("wrong", "questioned", "help");
+
     private final SlotRow row;
     private final ZoneModel model;
     private final Wording wording;
     private final SlotWords words;
     private final Map<Pointer, FieldBox> boxes = new LinkedHashMap<>();
     private final Label message = new Label();
+    private final boolean quiet;
     private Optional<QualityButton> quality = Optional.empty();
+    private Optional<ActionButton> carry = Optional.empty();
+    private Optional<LineButtons> lineButtons = Optional.empty();
 
-    RowView(SlotRow row, ZoneModel model, Wording wording) {
+    /** @param quiet whether what is to be said is said elsewhere, since large keys take the room */
+    RowView(SlotRow row, ZoneModel model, Wording wording, boolean quiet) {
         this.row = row;
         this.model = model;
         this.wording = wording;
+        this.quiet = quiet;
         this.words = new SlotWords(wording, model.setting().register());
         getStyleClass().add("reading-row");
         message.getStyleClass().add("message");
@@ -47,7 +53,10 @@ final class RowView extends VBox {
         message.visibleProperty().bind(message.textProperty().isNotEmpty());
         message.setMinHeight(USE_PREF_SIZE);
         getChildren().addAll(cells(), message);
-        row.growing().filter(place -> model.open()).ifPresent(place -> getChildren().add(lineButtons(place)));
+        if (row.line().isPresent() && model.open()) {
+            lineButtons = Optional.of(new LineButtons(row, model, wording));
+            lineButtons.ifPresent(getChildren()::add);
+        }
         update();
     }
 
@@ -85,7 +94,21 @@ final class RowView extends VBox {
         }
         line.getChildren().addAll(cells);
         quality.ifPresent(line.getChildren()::add);
+        if (CarriedOver.isPlain(row.field().key())) {
+            carry = Optional.of(carryButton());
+            carry.ifPresent(line.getChildren()::add);
+        }
         return line;
+    }
+
+    /** Takes the geometry of the last survey over: an act of its own, beside the first thing that it fills in. */
+    private ActionButton carryButton() {
+        ActionButton button = new ActionButton(Weight.PLAIN, wording.text("zone.carry-over"),
+                model.tables()::carryOver);
+        button.setId("carry-over");
+        button.getStyleClass().add("beside");
+        button.setMinWidth(0);
+        return button;
     }
 
     private FieldBox box(Slot slot) {
@@ -124,35 +147,40 @@ final class RowView extends VBox {
         return button;
     }
 
-    private HBox lineButtons(Pointer place) {
-        ActionButton add = ActionButton.with(Icon.PLUS, ContentDisplay.LEFT, Weight.PLAIN,
-                wording.text("screen.zone.add." + row.field().key()),
-                () -> model.addLine(row.field().where()));
-        add.setId("add-" + row.field().key());
-        ActionButton remove = ActionButton.with(Icon.CROSS, ContentDisplay.LEFT, Weight.PLAIN,
-                wording.text("screen.zone.remove-line"), () -> model.removeLine(row.place()));
-        remove.setId("remove-" + row.field().key());
-        HBox buttons = new HBox(add, remove);
-        buttons.getStyleClass().add("row");
-        for (ActionButton button : List.of(add, remove)) {
-            button.getStyleClass().add("secondary-target");
-            button.setMaxWidth(Double.MAX_VALUE);
-            HBox.setHgrow(button, Priority.ALWAYS);
-        }
-        return buttons;
-    }
-
     /** Shows what the survey holds now. */
     void update() {
         for (Slot slot : row.slots()) {
             update(slot, boxes.get(slot.where()));
         }
-        boolean here = row.slots().stream().anyMatch(slot -> slot.equals(model.active()));
-        Optional<ZoneModel.Note> note = here ? model.noteProperty().get()
+        Said said = said();
+        message.setText(quiet ? "" : said.words());
+        if (!message.getStyleClass().contains(said.tone())) {
+            message.getStyleClass().removeAll(TONES);
+            message.getStyleClass().add(said.tone());
+        }
+        carry.ifPresent(button -> {
+            button.setVisible(model.tables().carriesOverAt(row.field().key()));
+            button.setManaged(button.isVisible());
+        });
+        lineButtons.ifPresent(LineButtons::update);
+    }
+
+    /** What is said below a row, and how. */
+    record Said(String words, String tone) {
+    }
+
+    /** What is to be said of the row: what is wrong or doubtful, else that it was taken over, else how it is read. */
+    Said said() {
+        Optional<Note> note = holdsActive() ? model.noteProperty().get()
                 : row.slots().stream().flatMap(slot -> model.impossible(slot).stream()).findFirst();
-        message.setText(note.map(this::sentence).orElse(""));
-        boolean wrong = note.filter(RowView::isWrong).isPresent();
-        message.getStyleClass().setAll("label", "message", wrong ? "wrong" : "questioned");
+        if (note.isPresent()) {
+            return new Said(sentence(note.get()), note.get().isWrong() ? "wrong" : "questioned");
+        }
+        if (row.slots().stream().anyMatch(model::carriedOver)) {
+            return new Said(wording.text("zone.carried-over"), "help");
+        }
+        return new Said(holdsActive() && row.line().filter(line -> line > 1 || row.slots().size() < 3).isEmpty()
+                ? row.field().head().help().map(help -> help.in(wording.words().language())).orElse("") : "", "help");
     }
 
     private void update(Slot slot, FieldBox box) {
@@ -161,19 +189,20 @@ final class RowView extends VBox {
         String typed = model.typedProperty().get();
         Unit unit = unit(slot);
         if (active && !typed.isEmpty()) {
-            box.valueProperty().set(typed);
+            box.valueProperty().set(slot instanceof Slot.TextSlot ? typed : PadText.shown(typed));
             box.unitProperty().set(unit == null ? "" : wording.symbol(unit));
         } else {
             Optional<Node> answer = model.answer(slot);
             SlotWords.Shown shown = active ? words.shownIn(slot, answer, Optional.ofNullable(unit))
                     : words.shown(slot, answer);
-            box.valueProperty().set(shown.value());
+            box.valueProperty().set(slot instanceof Slot.MeasureSlot ? PadText.shown(shown.value()) : shown.value());
             box.unitProperty().set(shown.unit().isEmpty() && unit != null ? wording.symbol(unit) : shown.unit());
         }
         box.freshProperty().set(active && typed.isEmpty() && !box.valueProperty().get().isEmpty());
         box.ghostProperty().set(row.slots().size() == 1 || slot.where().last().equals("depth")
                 ? words.ghost(slot, model.lastAnswer(slot), unit) : "");
         box.judgementProperty().set(judged(slot, active));
+        box.carriedProperty().set(model.carriedOver(slot));
         quality.filter(button -> slot instanceof Slot.MeasureSlot measured && measured.markable()).ifPresent(button -> {
             Optional<Quality> mark = model.answer(slot).flatMap(SlotWords::quantity).flatMap(Quantity::quality);
             button.setVisible(mark.isPresent());
@@ -188,26 +217,20 @@ final class RowView extends VBox {
         }
         return slot.equals(model.active()) ? model.inHandProperty().get().unit().orElseThrow()
                 : model.answer(slot).flatMap(SlotWords::quantity).map(Quantity::unit)
-                        .orElse(measured.measure().unit(model.unitsProperty().get()));
+                        .orElse(model.offered(measured.measure()));
     }
 
     private Judgement judged(Slot slot, boolean active) {
-        return (active ? model.noteProperty().get() : model.impossible(slot)).map(note -> isWrong(note) ? Judgement.WRONG : Judgement.QUESTIONED)
-                .orElse(Judgement.NONE);
+        return (active ? model.noteProperty().get() : model.impossible(slot))
+                .map(note -> note.isWrong() ? Judgement.WRONG : Judgement.QUESTIONED).orElse(Judgement.NONE);
     }
 
-    private static boolean isWrong(ZoneModel.Note note) {
-        return note instanceof ZoneModel.Note.NoNumber || note instanceof ZoneModel.Note.IsolateFirst
-                || note instanceof ZoneModel.Note.Judged judged
-                && judged.judgement() instanceof bedmark.form.Judgement.Refusal;
-    }
-
-    private String sentence(ZoneModel.Note note) {
-        if (note instanceof ZoneModel.Note.Judged judged) {
+    private String sentence(Note note) {
+        if (note instanceof Note.Judged judged) {
             return wording.sentence(judged.judgement(), judged.field());
-        } else if (note instanceof ZoneModel.Note.NoNumber none) {
+        } else if (note instanceof Note.NoNumber none) {
             return wording.sentence(none.reason());
-        } else if (note instanceof ZoneModel.Note.Gap gap) {
+        } else if (note instanceof Note.Gap gap) {
             return wording.text("screen.zone.gap", gap.field().head().label().in(wording.words().language()));
         }
         return wording.text("screen.zone.isolate-first");

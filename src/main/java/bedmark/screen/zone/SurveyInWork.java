@@ -6,7 +6,9 @@ import bedmark.screen.Scribe;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.QueueState;
+import bedmark.survey.Survey;
 import bedmark.survey.SurveyHistory;
+import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
 import java.util.function.Consumer;
@@ -71,7 +73,8 @@ final class SurveyInWork {
     }
 
     /**
-     * Takes back the newest change that still counts, once everything before it is saved.
+     * Takes back the newest change that still counts, once everything before it is saved; the marks of what is carried
+     * over go with the readings that they were changed for.
      *
      * @param undone told the place of the change
      */
@@ -80,8 +83,37 @@ final class SurveyInWork {
             undoWanted = Optional.of(undone);
             return;
         }
-        history.newest().filter(change -> open()).ifPresent(change ->
-                save(new Act.AnswerUndone(id, change.sequence()), () -> undone.accept(change.where())));
+        List<SurveyHistory.Change> counting = open() ? newest() : List.of();
+        for (int i = 0; i < counting.size(); i++) {
+            boolean last = i == counting.size() - 1;
+            save(new Act.AnswerUndone(id, counting.get(i).sequence()), () -> {
+                if (last) {
+                    undone.accept(place(counting));
+                }
+            });
+        }
+    }
+
+    /**
+     * The newest change, and the one before where the two are one act: marks are set before what is carried over, and
+     * taken off after what was read anew.
+     */
+    private List<SurveyHistory.Change> newest() {
+        List<SurveyHistory.Change> counting = history.changes().stream().filter(change -> !change.undone()).toList();
+        int size = counting.size();
+        if (size < 2) {
+            return counting;
+        }
+        SurveyHistory.Change last = counting.get(size - 1);
+        SurveyHistory.Change before = counting.get(size - 2);
+        boolean pair = last.where().equals(CarriedOver.MARKS)
+                || last.where().equals(Survey.READINGS) && before.where().equals(CarriedOver.MARKS);
+        return pair ? List.of(last, before) : List.of(last);
+    }
+
+    private static Pointer place(List<SurveyHistory.Change> act) {
+        return act.stream().map(SurveyHistory.Change::where).filter(where -> !where.equals(CarriedOver.MARKS))
+                .findFirst().orElse(CarriedOver.MARKS);
     }
 
     /** Completes the survey. */

@@ -26,6 +26,8 @@ import java.util.Optional;
  * @param beltState what the belt does, as far as the person said so
  */
 record Typing(Locale locale, Clock clock, Optional<BeltState> beltState) {
+    private static final BigDecimal QUARTER = new BigDecimal("0.25");
+    private static final BigDecimal QUARTERS = BigDecimal.valueOf(4);
     private static final MathContext CONVERTED = new MathContext(4);
 
     /**
@@ -110,7 +112,25 @@ record Typing(Locale locale, Clock clock, Optional<BeltState> beltState) {
                 ? measured.measure().step(inHand.unit().orElseThrow())
                 : inHand.slot() instanceof Slot.CountSlot counted ? counted.count().step() : BigDecimal.ZERO;
         return new NumberEntry(locale).read(now.isEmpty() ? "0" : now) instanceof TypedNumber.Accepted accepted
-                ? Optional.of(local(accepted.value().add(step.multiply(BigDecimal.valueOf(direction)))
-                        .max(BigDecimal.ZERO))) : Optional.empty();
+                ? Optional.of(written(accepted.value().add(step.multiply(BigDecimal.valueOf(direction)))
+                        .max(BigDecimal.ZERO), inHand.unit(), step)) : Optional.empty();
+    }
+
+    /** A stepped number as a person would type it: by quarters where inches go by quarters. */
+    private String written(BigDecimal number, Optional<Unit> unit, BigDecimal step) {
+        BigDecimal[] whole = number.divideAndRemainder(BigDecimal.ONE);
+        BigDecimal quarters = whole[1].multiply(QUARTERS);
+        if (!unit.equals(Optional.of(Unit.INCH)) || step.compareTo(QUARTER) != 0
+                || quarters.stripTrailingZeros().scale() > 0) {
+            return local(number);
+        }
+        String fraction = switch (quarters.intValueExact()) {
+            case 1 -> "1/4";
+            case 2 -> "1/2";
+            case 3 -> "3/4";
+            default -> "";
+        };
+        String inches = whole[0].signum() == 0 && !fraction.isEmpty() ? "" : whole[0].toBigInteger().toString();
+        return (inches + " " + fraction).strip();
     }
 }

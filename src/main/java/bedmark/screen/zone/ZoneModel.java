@@ -5,28 +5,24 @@ import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
 import bedmark.engine.Assessment;
-import bedmark.form.Field;
-import bedmark.form.Judgement;
+import bedmark.form.Measure;
 import bedmark.form.SpeedField;
-import bedmark.form.StationsField;
 import bedmark.quantity.BeltState;
 import bedmark.quantity.Quality;
 import bedmark.quantity.Quantity;
+import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.TypedNumber;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import bedmark.survey.Survey;
 import bedmark.survey.SurveyHistory;
-import java.util.Comparator;
-import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
-import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
-import java.util.stream.Stream;
+import java.util.function.UnaryOperator;
 import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -43,10 +39,12 @@ import javafx.beans.value.ObservableValue;
  */
 public final class ZoneModel {
     private final ZoneSetting setting;
-    private final Map<SpeedField, SpeedField.Way> ways = new HashMap<>();
-    private final Map<Pointer, Unit> chosenUnits = new HashMap<>();
+    private final SpeedWays ways = new SpeedWays();
+    private final UnitChoice unitChoice = new UnitChoice();
     private final Set<Pointer> believed = new HashSet<>();
+    private final Judging judging;
     private final SurveyInWork work;
+    private final Tables tables;
     private final BooleanBinding undoable;
     private final ReadOnlyObjectWrapper<Branch> survey;
     private final ReadOnlyObjectWrapper<List<SlotRow>> rows;
@@ -66,25 +64,6 @@ public final class ZoneModel {
     public record InHand(Slot slot, Optional<Unit> unit) {
     }
 
-    /** Something to say below the active cell. */
-    public sealed interface Note {
-        /** What is wrong or doubtful about an answer. */
-        record Judged(Judgement judgement, Field field) implements Note {
-        }
-
-        /** Why the typing is no number. */
-        record NoNumber(TypedNumber.Reason reason) implements Note {
-        }
-
-        /** The field must be answered before the survey can be completed. */
-        record Gap(Field field) implements Note {
-        }
-
-        /** A depth can be measured on an isolated belt only. */
-        record IsolateFirst() implements Note {
-        }
-    }
-
     /**
      * Opens a survey.
      *
@@ -93,7 +72,9 @@ public final class ZoneModel {
      */
     public ZoneModel(ZoneSetting setting, UnitSystem units, Locale locale) {
         this.setting = setting;
+        this.judging = new Judging(setting);
         this.work = new SurveyInWork(setting.history(), setting.scribe(), setting.person());
+        this.tables = new Tables(this, work, setting.last());
         this.units.set(units);
         this.locale.set(locale);
         this.survey = new ReadOnlyObjectWrapper<>(document());
@@ -103,13 +84,23 @@ public final class ZoneModel {
         typed.addListener((property, before, now) -> preview());
         this.undoable = typed.isNotEmpty().or(work.undoableProperty());
         this.units.addListener((property, before, now) -> unitChanged());
-        this.locale.addListener((property, before, now) -> preview());
-        activate(firstToAnswer());
+        this.locale.addListener((property, before, now) -> localeChanged(before));
+        activateFirst();
     }
 
     /** The survey as it is saved, or on its way to be. */
     private Branch document() {
         return work.documentProperty().get();
+    }
+
+    /** The survey as it is saved, or on its way to be: without what is being typed. */
+    public ReadOnlyObjectProperty<Branch> keptProperty() {
+        return work.documentProperty();
+    }
+
+    /** Makes the cell active where work begins. */
+    void activateFirst() {
+        activate(firstToAnswer());
     }
 
     /** Where work begins: the first gap, or the first cell where there is none. */
@@ -189,7 +180,7 @@ public final class ZoneModel {
     /** What the survey holds for a cell. */
     public Optional<Node> answer(Slot slot) {
         return slot instanceof Slot.WaySlot way
-                ? Optional.of(Node.text(wayOf(way.field()).key())) : survey.get().at(slot.where());
+                ? Optional.of(Node.text(ways.of(way.field(), survey.get()).key())) : survey.get().at(slot.where());
     }
 
     /** What the last survey held for a cell. */
@@ -235,7 +226,7 @@ public final class ZoneModel {
         if (!keep()) {
             return;
         }
-        Optional<Note> question = firstJudgement(here).filter(ZoneModel::isDoubt);
+        Optional<Note> question = firstJudgement(here).filter(Note::isDoubt);
         if (question.isPresent() && believed.add(here.where())) {
             show(here);
             note.set(question);
@@ -244,10 +235,6 @@ public final class ZoneModel {
         List<Slot> slots = slots();
         int index = indexOf(slots, here.where());
         show(slots.get(Math.max(0, Math.min(slots.size() - 1, index + step))));
-    }
-
-    private static boolean isDoubt(Note note) {
-        return note instanceof Note.Judged judged && judged.judgement() instanceof Judgement.Doubt;
     }
 
     private static int indexOf(List<Slot> slots, Pointer where) {
@@ -307,7 +294,7 @@ public final class ZoneModel {
         typing().stepped(inHand.get(), editable(), direction).ifPresent(typed::set);
     }
 
-    private Typing typing() {
+    Typing typing() {
         return new Typing(locale.get(), setting.clock(), beltState.get());
     }
 
@@ -327,9 +314,26 @@ public final class ZoneModel {
         }
     }
 
+    /** What is set anew was read anew, and is carried over no longer. */
     private void set(Pointer where, Optional<Node> answer) {
         believed.remove(where);
         work.change(Answers.change(document(), where, answer));
+        CarriedOver.readAnew(document(), where).ifPresent(work::change);
+    }
+
+    /** What is done to the tables as a whole. */
+    public Tables tables() {
+        return tables;
+    }
+
+    /** Whether the answer of a cell was taken over from the last survey and not read since. */
+    public boolean carriedOver(Slot slot) {
+        return CarriedOver.holds(document(), slot.where());
+    }
+
+    /** What happened to a cell, newest first. */
+    List<FieldHistory.Step> historyOf(Slot slot) {
+        return FieldHistory.of(history(), slot.where());
     }
 
     /** Whether the survey still takes answers; a completed one is corrected by a new revision. */
@@ -346,65 +350,11 @@ public final class ZoneModel {
         }
     }
 
-    /** Adds a station or a segment behind the last one of a table and makes it active. */
-    public void addLine(Pointer table) {
-        keep();
-        int lines = document().at(table).filter(Node.Series.class::isInstance)
-                .map(node -> ((Node.Series) node).items().size()).orElse(0);
-        work.change(Answers.withLine(document(), table, Branch.EMPTY));
-        activate(table.child(lines));
-    }
-
-    /** Takes a line out of a table. */
-    public void removeLine(Pointer line) {
-        typed.set("");
-        work.change(Answers.withoutLine(document(), line));
-        activate(new Pointer(line.tokens().subList(0, line.tokens().size() - 1)));
-    }
-
-    /**
-     * Sets the depth of a station as pulled on the picture: it starts as estimated.
-     *
-     * @param line     the station's index; the number of stations for a new one
-     * @param position from the start of the zone, for a new station
-     */
-    public void pull(int line, Quantity position, Quantity depth) {
-        Pointer table = Survey.READINGS.child(StationsField.KEY);
-        typed.set("");
-        work.change(pulled(line, position, depth));
-        activate(table.child(line).child("depth"));
-    }
-
-    /** The survey as it would be with the bed pulled to a depth; nothing is saved. */
-    public Branch previewPull(int line, Quantity position, Quantity depth) {
-        return pulled(line, position, depth).in(document());
-    }
-
-    private Answers.Change pulled(int line, Quantity position, Quantity depth) {
-        Pointer table = Survey.READINGS.child(StationsField.KEY);
-        Branch seen = Branch.write(typing().stamped(depth).withQuality(Quality.ESTIMATED));
-        return document().at(table.child(line)).isPresent()
-                ? Answers.change(document(), table.child(line).child("depth"), Optional.of(seen))
-                : Answers.withLine(document(), table, Branch.EMPTY.with("position", position).with("depth", seen));
-    }
-
     private void chooseWay(SpeedField field, Optional<Node> answer) {
-        Optional<SpeedField.Way> chosen = answer.flatMap(node -> Stream.of(SpeedField.Way.values())
-                .filter(way -> node.equals(Node.text(way.key()))).findFirst());
-        chosen.ifPresent(way -> {
-            ways.put(field, way);
-            for (SpeedField.Way other : SpeedField.Way.values()) {
-                if (other != way && document().at(other.where()).isPresent()) {
-                    work.change(new Answers.Change(other.where(), Optional.empty()));
-                }
-            }
+        ways.choose(field, answer, document()).ifPresent(cleared -> {
+            cleared.forEach(work::change);
             refresh();
         });
-    }
-
-    private SpeedField.Way wayOf(SpeedField field) {
-        return field.ways(survey.get()).stream().findFirst()
-                .orElseGet(() -> ways.getOrDefault(field, SpeedField.Way.DIRECT));
     }
 
     /** Says what the belt does now; readings from here on carry it. */
@@ -432,8 +382,18 @@ public final class ZoneModel {
 
     /** Types on in another unit; what stands in the cell keeps the unit that it was entered in. */
     public void chooseUnit(Unit chosen) {
-        chosenUnits.put(active().where(), chosen);
+        unitChoice.choose(active(), chosen);
         inHand.set(new InHand(active(), Optional.of(chosen)));
+        preview();
+    }
+
+    /** What is typed keeps its meaning: the decimal sign of the one number format becomes that of the other. */
+    private void localeChanged(Locale before) {
+        char old = new QuantityFormat(before).decimalSign();
+        char now = new QuantityFormat(locale.get()).decimalSign();
+        if (old != now && !(active() instanceof Slot.TextSlot)) {
+            typed.set(typed.get().replace(old, now));
+        }
         preview();
     }
 
@@ -444,13 +404,18 @@ public final class ZoneModel {
     }
 
     private Optional<Unit> unitOf(Slot slot) {
-        if (!(slot instanceof Slot.MeasureSlot measured)) {
-            return Optional.empty();
-        }
-        return Optional.ofNullable(chosenUnits.get(slot.where()))
-                .or(() -> quantity(document(), slot.where()).map(Quantity::unit)
-                        .filter(measured.measure().units()::contains))
-                .or(() -> Optional.of(measured.measure().unit(units.get())));
+        return unitChoice.of(slot, document(), units.get());
+    }
+
+    /** The unit that a number is asked in first: the one that the person likes, where the form has it. */
+    Unit offered(Measure measure) {
+        return unitChoice.offered(measure, units.get());
+    }
+
+    /** Asks first in the unit that the person likes better than a usual one. */
+    void likeUnits(UnaryOperator<Unit> better) {
+        unitChoice.like(better);
+        unitChanged();
     }
 
     /** The unit in which the active cell is typed; only where it is a number with a unit. */
@@ -464,8 +429,7 @@ public final class ZoneModel {
     }
 
     private List<SlotRow> layOut() {
-        return Slots.rows(setting.form(), document(), field -> field.ways(document()).stream().findFirst()
-                .orElseGet(() -> ways.getOrDefault(field, SpeedField.Way.DIRECT)));
+        return Slots.rows(setting.form(), document(), field -> ways.of(field, document()));
     }
 
     private void preview() {
@@ -475,8 +439,9 @@ public final class ZoneModel {
         Branch now = read.answer().map(answer -> Answers.change(document(), active().where(), Optional.of(answer))
                 .in(document())).orElseGet(this::document);
         if (!Objects.equals(survey.get(), now)) {
-            survey.set(now);
+            // Who draws the survey looks at what it comes to as well.
             outcome.set(judge(now));
+            survey.set(now);
         }
     }
 
@@ -505,15 +470,11 @@ public final class ZoneModel {
 
     /** What is impossible about the answer of a cell, active or not: it stands until it is mended. */
     public Optional<Note> impossible(Slot slot) {
-        return firstJudgement(slot).filter(note -> !isDoubt(note));
+        return judging.impossible(document(), slot);
     }
 
-    /** What there is to say about the answer of a cell, as it is saved: an impossibility before a doubt. */
     private Optional<Note> firstJudgement(Slot slot) {
-        return slot.field().judge(document(), setting.last().orElse(Branch.EMPTY)).stream()
-                .filter(judgement -> judgement.where().holds(slot.where()) || slot.where().holds(judgement.where()))
-                .min(Comparator.comparing(judgement -> judgement instanceof Judgement.Doubt))
-                .map(judgement -> new Note.Judged(judgement, slot.field()));
+        return judging.first(document(), slot);
     }
 
     /**
@@ -526,26 +487,14 @@ public final class ZoneModel {
         if (!keep()) {
             return false;
         }
-        List<Judgement.Refusal> refusals = setting.form().refusals(document());
-        if (!refusals.isEmpty()) {
-            activate(refusals.get(0).where());
-            setting.form().fieldAt(refusals.get(0).where()).ifPresent(field ->
-                    note.set(Optional.of(new Note.Judged(refusals.get(0), field))));
-            return false;
+        Optional<Judging.Obstacle> obstacle = judging.obstacle(document(), outcome.get().assessment());
+        obstacle.ifPresent(found -> {
+            activate(found.where());
+            note.set(Optional.of(found.note()));
+        });
+        if (obstacle.isEmpty()) {
+            work.complete(signedOffBy);
         }
-        Optional<Field> gap = setting.form().gaps(document()).stream().findFirst().or(this::engineGap);
-        if (gap.isPresent()) {
-            activate(gap.get().where());
-            note.set(Optional.of(new Note.Gap(gap.get())));
-            return false;
-        }
-        work.complete(signedOffBy);
-        return true;
-    }
-
-    /** A reading that the verdict waits for; what the register lacks the person here cannot give. */
-    private Optional<Field> engineGap() {
-        return outcome.get().assessment().stream().flatMap(found -> found.missingRequired().stream())
-                .flatMap(name -> setting.form().fieldAt(Pointer.parse(name)).stream()).findFirst();
+        return obstacle.isEmpty();
     }
 }

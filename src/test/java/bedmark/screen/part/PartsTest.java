@@ -82,7 +82,7 @@ class PartsTest {
     @Test
     void verdictSaysEverythingInWordsToo() throws Exception {
         Glass.on(() -> {
-            VerdictBlock block = new VerdictBlock(Optional.empty());
+            VerdictBlock block = new VerdictBlock(List.of());
             block.show(Samples.OVERLOADED);
             assertTrue(block.getAccessibleText().startsWith("overloaded. Overloaded: the bed"));
             block.show(Samples.INCOMPLETE);

@@ -18,7 +18,7 @@ public final class Samples {
             Optional.of(new PadSetup.Steps("−5", "+5")), Optional.of("mm | in"));
     public static final PadSetup INCHES = new PadSetup('.', false, true,
             Optional.of(new PadSetup.Steps("−¼", "+¼")), Optional.of("in | mm"));
-    public static final PadWords WORDS = new PadWords("back", "next", "undo", "take one sign away", "decimal point",
+    public static final PadWords WORDS = new PadWords("back", "next", "history", "undo", "take one sign away", "decimal point",
             "quarters", "turn the sign round", note -> note == PadNote.SECOND_DECIMAL_SIGN
                     ? "One decimal point is there already." : "refused: " + note.code());
     public static final Verdict OVERLOADED = new Verdict(LevelShape.OVERLOADED, "overloaded",

@@ -123,7 +123,7 @@ class ZoneModelTest {
         model.activate(SPEED);
         assertEquals(LENGTH, model.active().where());
         assertEquals("4 1/", model.typedProperty().get());
-        assertTrue(model.noteProperty().get().orElseThrow() instanceof ZoneModel.Note.NoNumber);
+        assertTrue(model.noteProperty().get().orElseThrow() instanceof Note.NoNumber);
     }
 
     @Test
@@ -165,7 +165,7 @@ class ZoneModelTest {
         model.activate(DEPTH);
         model.mark(Quality.MEASURED);
         settle();
-        assertTrue(model.noteProperty().get().orElseThrow() instanceof ZoneModel.Note.IsolateFirst);
+        assertTrue(model.noteProperty().get().orElseThrow() instanceof Note.IsolateFirst);
         assertEquals(Optional.of(Quality.ESTIMATED), read(DEPTH).quality());
         model.mark(Quality.SUSPECT);
         settle();
@@ -217,12 +217,12 @@ class ZoneModelTest {
     void pulledBedIsAStationThatIsEstimated() throws Exception {
         type(LENGTH, "5");
         Quantity position = Quantity.of("1000", Unit.MILLIMETRE);
-        model.pull(0, position, Quantity.of("215", Unit.MILLIMETRE));
+        model.tables().pull(0, position, Quantity.of("215", Unit.MILLIMETRE));
         settle();
         assertEquals("215", read(DEPTH).value().toPlainString());
         assertEquals(Optional.of(Quality.ESTIMATED), read(DEPTH).quality());
         assertEquals("1000", read(Pointer.parse("/readings/bedDepths/0/position")).value().toPlainString());
-        model.pull(0, position, Quantity.of("220", Unit.MILLIMETRE));
+        model.tables().pull(0, position, Quantity.of("220", Unit.MILLIMETRE));
         settle();
         assertEquals("220", read(DEPTH).value().toPlainString());
         assertEquals(DEPTH, model.active().where());
@@ -231,11 +231,11 @@ class ZoneModelTest {
     @Test
     void linesOfATableComeAndGo() throws Exception {
         type(DEPTH, "120");
-        model.addLine(Pointer.parse("/readings/bedDepths"));
+        model.tables().addLine(Pointer.parse("/readings/bedDepths"));
         settle();
         assertEquals(Pointer.parse("/readings/bedDepths/1/position"), model.active().where());
-        model.removeLine(Pointer.parse("/readings/bedDepths/1"));
-        model.removeLine(Pointer.parse("/readings/bedDepths/0"));
+        model.tables().removeLine(Pointer.parse("/readings/bedDepths/1"));
+        model.tables().removeLine(Pointer.parse("/readings/bedDepths/0"));
         settle();
         assertFalse(journal().at(Pointer.parse("/readings/bedDepths")).isPresent());
     }
@@ -264,7 +264,7 @@ class ZoneModelTest {
     void completingLeadsToTheFirstGapAndIsDoneWithoutOne() throws Exception {
         type(LENGTH, "5");
         assertFalse(model.complete("A. Vale"));
-        assertTrue(model.noteProperty().get().orElseThrow() instanceof ZoneModel.Note.Gap);
+        assertTrue(model.noteProperty().get().orElseThrow() instanceof Note.Gap);
         type(SPEED, "1.5");
         type(Pointer.parse("/readings/bedDepths/0/position"), "1");
         type(DEPTH, "120");
@@ -272,7 +272,7 @@ class ZoneModelTest {
             int line = side.equals("left") ? 0 : 1;
             Pointer place = Pointer.parse("/readings/seals").child(line);
             if (line == 1) {
-                model.addLine(Pointer.parse("/readings/seals"));
+                model.tables().addLine(Pointer.parse("/readings/seals"));
                 settle();
             }
             answer(place.child("side"), side);

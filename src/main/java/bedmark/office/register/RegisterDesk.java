@@ -1,0 +1,63 @@
+package bedmark.office.register;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Node;
+import bedmark.document.Refused;
+import bedmark.office.OfficeStore;
+import bedmark.survey.OfficeDeed;
+import bedmark.survey.Register;
+import java.util.List;
+import java.util.Optional;
+
+/** Changes a plant's register in an office store, whole or not at all. */
+public final class RegisterDesk {
+    private final OfficeStore store;
+
+    public RegisterDesk(OfficeStore store) {
+        this.store = store;
+    }
+
+    /**
+     * What holds today of the plant that is meant.
+     *
+     * @param plant its id; the only one where there is none given
+     * @param forms the forms of a plant that is new here
+     * @throws Refused {@code plant-unclear} where none is named and there is not exactly one
+     */
+    public Branch head(Optional<String> plant, List<Branch> forms) {
+        List<String> known = List.copyOf(store.registers().keySet());
+        if (plant.isEmpty() && known.size() != 1) {
+            throw new Refused(Defect.in("", "plant-unclear", String.join(", ", known)));
+        }
+        String id = plant.orElseGet(() -> known.get(0));
+        return store.head(id).orElseGet(() -> Branch.EMPTY
+                .with("plant", Branch.EMPTY.with("id", id).with("name", id).with("transfers",
+                        new Node.Series(List.of())))
+                .with("forms", new Node.Series(List.copyOf(forms))).with("rounds", new Node.Series(List.of())));
+    }
+
+    /**
+     * Takes a draft over.
+     *
+     * @throws Refused {@code draft-unsound} where it has defects; whatever makes a register impossible
+     */
+    public void take(Draft draft, String why, String person) {
+        if (!draft.sound()) {
+            throw new Refused(Defect.in("", "draft-unsound", Integer.toString(draft.defects().size())));
+        }
+        take(draft.head(), why, person);
+    }
+
+    /** Takes a head over that a person changed; nothing happens where it says what holds already. */
+    public void take(Branch head, String why, String person) {
+        if (person.isBlank()) {
+            throw new Refused(Defect.in("", "person-absent"));
+        }
+        Branch plant = head.branch("plant").orElse(Branch.EMPTY);
+        String id = new Register(plant).document().text("id").orElse("");
+        if (!store.head(id).equals(Optional.of(head))) {
+            store.act(person, new OfficeDeed.RegisterChanged(id, head, why));
+        }
+    }
+}

@@ -1,0 +1,125 @@
+package bedmark.office.register;
+
+import bedmark.document.Defect;
+import bedmark.document.Refused;
+import bedmark.office.register.Table.Cell;
+import bedmark.office.register.Table.Row;
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.StringReader;
+import java.io.UncheckedIOException;
+import java.math.BigDecimal;
+import java.nio.ByteBuffer;
+import java.nio.charset.CharacterCodingException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.stream.Stream;
+import org.apache.commons.csv.CSVFormat;
+import org.apache.commons.csv.CSVParser;
+import org.apache.commons.csv.CSVRecord;
+import org.dhatim.fastexcel.reader.CellType;
+import org.dhatim.fastexcel.reader.ReadableWorkbook;
+import org.dhatim.fastexcel.reader.Sheet;
+
+/** Reads tables: CSV with commas, semicolons or tabs, and workbooks. */
+public final class Tables {
+    private static final long LARGEST = 64L << 20;
+
+    private Tables() {
+    }
+
+    /**
+     * The tables of a file.
+     *
+     * @throws Refused {@code table-…} where it can't be read as what its name says
+     */
+    public static List<Table> read(Path file) {
+        String name = file.getFileName().toString();
+        try {
+            if (Files.size(file) > LARGEST) {
+                throw new Refused(Defect.in(name, "table-too-large", Long.toString(LARGEST >> 20)));
+            }
+            if (name.toLowerCase(Locale.ROOT).endsWith(".xlsx")) {
+                return workbook(file, name);
+            }
+            return List.of(csv(Files.readAllBytes(file), name));
+        } catch (IOException | UncheckedIOException e) {
+            throw new Refused(Defect.in(name, "table-unreadable"), e);
+        }
+    }
+
+    private static String stem(String name) {
+        return name.contains(".") ? name.substring(0, name.lastIndexOf('.')) : name;
+    }
+
+    static Table csv(byte[] bytes, String name) throws IOException {
+        String text;
+        try {
+            text = StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
+        } catch (CharacterCodingException e) {
+            throw new Refused(Defect.in(name, "table-not-utf8"), e);
+        }
+        String body = text.startsWith("\uFEFF") ? text.substring(1) : text;
+        CSVFormat format = CSVFormat.RFC4180.builder().setDelimiter(delimiter(body)).get();
+        List<Row> rows = new ArrayList<>();
+        try (CSVParser parser = format.parse(new StringReader(body))) {
+            for (CSVRecord record : parser) {
+                long line = parser.getCurrentLineNumber();
+                rows.add(new Row((int) Math.max(rows.size() + 1L, line),
+                        Stream.of(record.values()).map(cell -> new Cell(cell.strip(), false)).toList()));
+            }
+        } catch (UncheckedIOException | IllegalStateException e) {
+            throw new Refused(Defect.in(name, "table-quotes-wrong", Integer.toString(rows.size() + 1)), e);
+        }
+        return new Table(name, stem(name), rows);
+    }
+
+    /** What stands most often in the first line, outside of quotes. */
+    private static char delimiter(String text) {
+        String head = text.lines().filter(line -> !line.isBlank()).findFirst().orElse("").replaceAll("\"[^\"]*\"", "");
+        char best = ',';
+        for (char candidate : new char[] {';', '\t'}) {
+            if (head.chars().filter(c -> c == candidate).count() > head.chars().filter(c -> c == ',').count()) {
+                best = candidate;
+            }
+        }
+        return best;
+    }
+
+    private static List<Table> workbook(Path file, String name) throws IOException {
+        List<Table> tables = new ArrayList<>();
+        try (InputStream input = Files.newInputStream(file); ReadableWorkbook workbook = new ReadableWorkbook(input)) {
+            for (Sheet sheet : workbook.getSheets().toList()) {
+                List<Row> rows = new ArrayList<>();
+                try (Stream<org.dhatim.fastexcel.reader.Row> read = sheet.openStream()) {
+                    read.forEach(row -> rows.add(new Row(row.getRowNum(), row.stream().map(Tables::cell).toList())));
+                }
+                tables.add(new Table(name + " / " + sheet.getName(), sheet.getName(), rows));
+            }
+        } catch (RuntimeException e) {
+            // The library fails in ways of its own on what is no workbook.
+            throw new Refused(Defect.in(name, "table-no-workbook"), e);
+        }
+        return tables;
+    }
+
+    private static Cell cell(org.dhatim.fastexcel.reader.Cell cell) {
+        if (cell == null || cell.getType() == CellType.EMPTY) {
+            return new Cell("", false);
+        }
+        if (cell.getType() == CellType.ERROR) {
+            return new Cell(String.valueOf(cell.getRawValue()), true);
+        }
+        if (cell.getValue() instanceof BigDecimal number) {
+            BigDecimal plain = number.signum() == 0 ? BigDecimal.ZERO : number.stripTrailingZeros();
+            return new Cell(plain.scale() < 0 ? plain.setScale(0).toPlainString() : plain.toPlainString(), false);
+        }
+        String raw = cell.getRawValue() == null ? "" : cell.getRawValue().strip();
+        boolean failed = cell.getType() == CellType.FORMULA && raw.startsWith("#");
+        return new Cell(cell.getType() == CellType.STRING ? cell.asString().strip() : raw, failed);
+    }
+}

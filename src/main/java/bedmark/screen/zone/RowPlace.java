@@ -1,0 +1,55 @@
+package bedmark.screen.zone;
+
+import bedmark.wording.Wording;
+import java.util.Optional;
+import javafx.scene.layout.StackPane;
+
+/** The place of a row in the form: as high as a row, and empty until the row is built. */
+final class RowPlace extends StackPane {
+    private final SlotRow row;
+    private final ZoneModel model;
+    private final Wording wording;
+    private final boolean quiet;
+    private Optional<RowView> view = Optional.empty();
+
+    /** @param quiet whether what is to be said of the row is said elsewhere */
+    RowPlace(SlotRow row, ZoneModel model, Wording wording, boolean quiet) {
+        this.row = row;
+        this.model = model;
+        this.wording = wording;
+        this.quiet = quiet;
+        getStyleClass().addAll("row-place", "to-come");
+    }
+
+    SlotRow row() {
+        return row;
+    }
+
+    boolean isBuilt() {
+        return view.isPresent();
+    }
+
+    void build() {
+        built();
+    }
+
+    /** The row, built now where it was not. */
+    RowView built() {
+        if (view.isEmpty()) {
+            view = Optional.of(new RowView(row, model, wording, quiet));
+            getStyleClass().remove("to-come");
+            getChildren().setAll(view.orElseThrow());
+        }
+        return view.orElseThrow();
+    }
+
+    /** Shows what the survey holds now, where the row is built. */
+    void update() {
+        view.ifPresent(RowView::update);
+    }
+
+    /** Whether the active cell is in this row. */
+    boolean holdsActive() {
+        return row.slots().stream().anyMatch(slot -> slot.where().equals(model.active().where()));
+    }
+}

@@ -14,6 +14,7 @@ public final class Benchmarks {
                     new GrowthSuite(),
                     new ScreenSuite(),
                     new SaveSuite(),
+                    new ReportSuite(),
                     new StartSuite(),
                     new ExportSuite(),
                     new WindowSuite(),

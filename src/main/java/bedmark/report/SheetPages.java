@@ -49,14 +49,24 @@ final class SheetPages {
         flow.booklet().entry(zone.tag(), flow.leaf(), true);
         head(zone, examined);
         List<SheetPart> parts = examined.sheet(words.wording());
-        double size = LARGEST;
-        List<Block> blocks = blocks(parts, Lettering.plain(size));
-        while (size - STEP > SMALLEST - STEP / 2 && height(blocks, Lettering.plain(size)) > flow.room()) {
-            size -= STEP;
-            blocks = blocks(parts, Lettering.plain(size));
+        Lettering lettering = largest(parts);
+        blocks(parts, lettering).forEach(block -> set(block, lettering));
+    }
+
+    /** The largest letters that let the parts fit into the room, the smallest ones where none do. */
+    private Lettering largest(List<SheetPart> parts) {
+        int fitting = 0;
+        int tooLarge = (int) Math.round((LARGEST - SMALLEST) / STEP) + 1;
+        while (tooLarge - fitting > 1) {
+            int tried = (fitting + tooLarge) / 2;
+            Lettering lettering = Lettering.plain(SMALLEST + tried * STEP);
+            if (height(blocks(parts, lettering), lettering) > flow.room()) {
+                tooLarge = tried;
+            } else {
+                fitting = tried;
+            }
         }
-        Lettering lettering = Lettering.plain(size);
-        blocks.forEach(block -> set(block, lettering));
+        return Lettering.plain(SMALLEST + fitting * STEP);
     }
 
     private void head(ReportZone zone, Examined examined) {

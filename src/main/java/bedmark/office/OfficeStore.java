@@ -543,17 +543,6 @@ public final class OfficeStore implements AutoCloseable {
         return ask(tables -> documents(tables, digests));
     }
 
-    /**
-     * A photo of a survey, from the pack that the survey came in.
-     *
-     * @param content digest of the survey's content
-     * @param sha256  of the photo, as the survey names it
-     * @return nothing where the pack is not here, or can't be read any more
-     */
-    public Optional<byte[]> photo(String content, String sha256) {
-        return ask(tables -> tables.packOf(content)).flatMap(pack -> shelf.photo(pack, sha256, options.limits()));
-    }
-
     /** The zone with that id, or with that tag where there is one alone. */
     public Optional<ZoneId> zone(String named) {
         List<ZoneRow> rows = ask(OfficeTables::zones);

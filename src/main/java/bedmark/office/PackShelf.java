@@ -5,13 +5,6 @@ import bedmark.document.Refused;
 import bedmark.journal.Digest;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
-import bedmark.journal.Progress;
-import bedmark.json.BundleReader;
-import bedmark.pack.PackLimits;
-import bedmark.pack.PackReader;
-import bedmark.pack.PackedPhoto;
-import bedmark.pack.ReadPack;
-import java.io.ByteArrayOutputStream;
 import java.io.FileInputStream;
 import java.io.IOException;
 import java.io.InputStream;
@@ -100,28 +93,6 @@ final class PackShelf {
             return input.readNBytes(chunk, 0, chunk.length);
         } catch (IOException e) {
             throw new Refused(Defect.in(source.toString(), "pack-unreadable", "read"), e);
-        }
-    }
-
-    /**
-     * A photo of a pack; its digest is proved once more.
-     *
-     * @return nothing where the pack does not hold it, is not here, or is not as it was
-     */
-    Optional<byte[]> photo(String pack, String sha256, PackLimits limits) {
-        if (!has(pack)) {
-            return Optional.empty();
-        }
-        try (ByteArrayOutputStream bytes = new ByteArrayOutputStream()) {
-            ReadPack read = new PackReader(limits, BundleReader::read).open(file(pack), Progress.NONE);
-            Optional<PackedPhoto> photo = read.photos().stream().filter(one -> one.sha256().equals(sha256)).findFirst();
-            if (photo.isEmpty()) {
-                return Optional.empty();
-            }
-            read.copy(photo.get(), bytes);
-            return Optional.of(bytes.toByteArray());
-        } catch (IOException | Refused e) {
-            return Optional.empty();
         }
     }
 

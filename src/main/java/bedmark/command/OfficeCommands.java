@@ -11,11 +11,15 @@ final class OfficeCommands {
         return new CommandLine(new Group.OfficeGroup())
                 .addSubcommand(new OfficeReceiveCommand(surroundings))
                 .addSubcommand(new OfficeRankCommand(surroundings))
+                .addSubcommand(new OfficeTrendCommand(surroundings))
+                .addSubcommand(new OfficeEnergyCommand(surroundings))
                 .addSubcommand(new OfficeAcceptCommand(surroundings))
                 .addSubcommand(new OfficeActionCommand(surroundings))
                 .addSubcommand(new OfficeSettleCommand(surroundings))
                 .addSubcommand(new OfficeExportCommand(surroundings))
                 .addSubcommand(new OfficeImportRegisterCommand(surroundings))
-                .addSubcommand(new OfficeExportRegisterCommand(surroundings));
+                .addSubcommand(new OfficeExportRegisterCommand(surroundings))
+                .addSubcommand(new OfficeRoundCommand(surroundings))
+                .addSubcommand(new OfficeReportCommand(surroundings));
     }
 }

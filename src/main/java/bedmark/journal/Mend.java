@@ -109,7 +109,8 @@ final class Mend {
             }
             Frame copied = unproven.get();
             return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(header.get().form(),
-                    SegmentHeader.Follows.ABANDONED, header.get().journal(), number, copied.sequence(), copied.previous()), copied));
+                    SegmentHeader.Follows.ABANDONED, header.get().journal(), number, copied.sequence(),
+                    copied.previous()), copied));
         } catch (IOException e) {
             // What is read stays readable; the next entry begins a segment of its own, and says so if it can't.
             return Optional.empty();

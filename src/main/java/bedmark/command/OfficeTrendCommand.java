@@ -1,0 +1,70 @@
+package bedmark.command;
+
+import bedmark.json.JsonWriter;
+import bedmark.office.JudgedZone;
+import bedmark.office.OfficeStore;
+import bedmark.office.trend.TrendDocument;
+import bedmark.office.trend.ZoneTrend;
+import bedmark.quantity.UnitSystem;
+import bedmark.survey.merge.ZoneId;
+import bedmark.wording.Wording;
+import java.nio.charset.StandardCharsets;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
+
+/** One loading zone over time. */
+@Command(name = "trend", mixinStandardHelpOptions = true,
+        description = "Follows one loading zone over time: depth, drag, power and seals, with what changed.")
+final class OfficeTrendCommand implements Callable<Integer> {
+    private final Surroundings surroundings;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Mixin
+    private OfficeDesk desk;
+
+    @Parameters(paramLabel = "TRANSFER", description = "The transfer point's id or tag.")
+    private String transfer;
+
+    @Option(names = "--json", description = "Print JSON, SI.")
+    private boolean json;
+
+    @Option(names = "--units", paramLabel = "metric|us", defaultValue = "metric",
+            description = "Units of the text (default: ${DEFAULT-VALUE}).")
+    private String units;
+
+    OfficeTrendCommand(Surroundings surroundings) {
+        this.surroundings = surroundings;
+    }
+
+    @Override
+    public Integer call() {
+        UnitSystem system = UnitSystem.ofCode(units).orElseThrow(() ->
+                new ParameterException(spec.commandLine(), "--units is metric or us, not '" + units + "'"));
+        try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
+                progress)) {
+            ZoneId zone = OfficeDesk.zone(store, transfer);
+            ZoneTrend trend = store.trend(zone);
+            progress.close();
+            if (json) {
+                surroundings.out().print(new String(JsonWriter.indented(TrendDocument.of(trend)),
+                        StandardCharsets.UTF_8));
+            } else {
+                Optional<JudgedZone> own = store.judged(zone);
+                Optional<JudgedZone> today = store.judgedToday(zone);
+                new TrendText(new Wording(surroundings.words(), system)).lines(trend, own, today)
+                        .forEach(line -> surroundings.out().println(line));
+            }
+            surroundings.out().flush();
+        }
+        return ExitCode.FINE;
+    }
+}

@@ -1,0 +1,93 @@
+package bedmark.command;
+
+import bedmark.engine.verdict.Level;
+import bedmark.office.JudgedZone;
+import bedmark.office.trend.Measure;
+import bedmark.office.trend.Observation;
+import bedmark.office.trend.Outlook;
+import bedmark.office.trend.Series;
+import bedmark.office.trend.ZoneTrend;
+import bedmark.quantity.Dimension;
+import bedmark.wording.Wording;
+import java.time.LocalDate;
+import java.time.ZoneOffset;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** A zone over time in words. */
+final class TrendText {
+    private static final double DAYS_A_YEAR = 365.25;
+
+    private final Wording wording;
+
+    TrendText(Wording wording) {
+        this.wording = wording;
+    }
+
+    List<String> lines(ZoneTrend trend, Optional<JudgedZone> own, Optional<JudgedZone> today) {
+        List<String> lines = new ArrayList<>();
+        for (Series series : trend.series()) {
+            say(lines, "", "office.trend." + series.measure().code());
+            for (Observation one : series.observations()) {
+                say(lines, "  ", one.replaced() ? "office.trend.replaced" : "office.trend.point",
+                        one.at().atZone(ZoneOffset.UTC).toLocalDate(), value(series.measure(), one.value()),
+                        value(series.measure(), 2 * one.standardUncertainty()), one.revision());
+            }
+            series.overloaded().ifPresent(limit -> say(lines, "  ", "office.trend.limit",
+                    value(series.measure(), limit)));
+            outlook(lines, series);
+        }
+        trend.changes().forEach(change -> say(lines, "", "office.trend.change." + change.kind().code(),
+                change.at().atZone(ZoneOffset.UTC).toLocalDate(), change.from(), change.to()));
+        say(lines, "", "office.interval." + trend.interval().reason().code(), trend.interval().days(),
+                wording.format().computed(trend.interval().pfDays().orElse(0), 0));
+        if (own.isPresent()) {
+            say(lines, "", "office.trend.judged", level(own), level(today));
+        }
+        return lines;
+    }
+
+    private String level(Optional<JudgedZone> judged) {
+        return judged.map(one -> one.assessment().level()).map(Level::code)
+                .map(code -> wording.text("verdict.level." + code)).orElse("-");
+    }
+
+    private void outlook(List<String> lines, Series series) {
+        Measure measure = series.measure();
+        if (series.outlook() instanceof Outlook.TooFew few) {
+            say(lines, "  ", "office.trend.too-few", few.surveys(), few.needed());
+        } else if (series.outlook() instanceof Outlook.Level level) {
+            say(lines, "  ", "office.trend.level", value(measure, level.line().lower() * DAYS_A_YEAR),
+                    value(measure, level.line().upper() * DAYS_A_YEAR), wording.format().computed(
+                            level.test().probability(), 3));
+        } else if (series.outlook() instanceof Outlook.Trend found) {
+            say(lines, "  ", found.line().slope() > 0 ? "office.trend.rising" : "office.trend.falling",
+                    value(measure, found.line().slope() * DAYS_A_YEAR),
+                    value(measure, found.line().lower() * DAYS_A_YEAR),
+                    value(measure, found.line().upper() * DAYS_A_YEAR),
+                    wording.format().computed(found.test().probability(), 3),
+                    wording.percent(found.line().confidence()));
+            found.near().ifPresent(reached -> reached(lines, "office.trend.near-reached", reached));
+            found.overloaded().ifPresent(reached -> reached(lines, "office.trend.overloaded-reached", reached));
+        }
+    }
+
+    private void reached(List<String> lines, String key, Outlook.Reached reached) {
+        say(lines, "  ", key, reached.expected(), reached.earliest(), reached.latest().map(LocalDate::toString)
+                .orElse(wording.text("office.trend.open")));
+    }
+
+    private String value(Measure measure, double si) {
+        return switch (measure) {
+            case DEPTH -> wording.computed(si, wording.units().smallLength());
+            case DRAG -> wording.computed(si, wording.units().unit(Dimension.FORCE));
+            case POWER -> wording.computed(si, wording.units().unit(Dimension.POWER));
+            case SEALS -> wording.percent(si);
+        };
+    }
+
+    private void say(List<String> lines, String before, String key, Object... details) {
+        lines.add(before + Wording.plain(wording.text(key, details)));
+    }
+}

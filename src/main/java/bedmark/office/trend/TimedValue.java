@@ -1,0 +1,9 @@
+package bedmark.office.trend;
+
+/**
+ * A value at a time.
+ *
+ * @param time in days
+ */
+record TimedValue(double time, double value) {
+}

@@ -1,0 +1,71 @@
+package bedmark.office.trend;
+
+import bedmark.engine.uncertainty.Estimate;
+import bedmark.office.JudgedZone;
+import bedmark.survey.merge.ZoneId;
+import java.time.Instant;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.Set;
+
+/**
+ * A loading zone over time.
+ *
+ * @param series   each measure that any survey tells
+ * @param changes  what is not as it was on the survey before, in time order
+ * @param interval how often the zone should be looked at
+ */
+public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, Interval interval) {
+    public ZoneTrend {
+        series = List.copyOf(series);
+        changes = List.copyOf(changes);
+    }
+
+    /**
+     * Follows a zone.
+     *
+     * @param counted  the results that count, in time order
+     * @param replaced results in whose place others stand
+     */
+    public static ZoneTrend of(ZoneId zone, List<JudgedZone> counted, List<JudgedZone> replaced) {
+        List<Change> changes = new ArrayList<>();
+        for (int i = 1; i < counted.size(); i++) {
+            changes.addAll(Change.between(counted.get(i - 1), counted.get(i)));
+        }
+        List<Series> series = new ArrayList<>();
+        for (Measure measure : Measure.values()) {
+            List<Observation> observations = new ArrayList<>();
+            counted.forEach(one -> observe(measure, one, false, observations));
+            replaced.forEach(one -> observe(measure, one, true, observations));
+            observations.sort((one, other) -> one.at().compareTo(other.at()));
+            if (!observations.isEmpty()) {
+                Measure.Limits limits = counted.isEmpty() ? Measure.Limits.NONE
+                        : measure.limits(counted.get(counted.size() - 1).assessment());
+                series.add(Series.of(measure, observations, begun(measure, changes), limits.near(),
+                        limits.overloaded()));
+            }
+        }
+        Interval interval = series.stream().filter(one -> one.measure() == Measure.DEPTH).findFirst()
+                .map(Interval::of).orElse(new Interval(Interval.MOST, Interval.Reason.TOO_FEW,
+                        OptionalDouble.empty()));
+        return new ZoneTrend(zone, series, changes, interval);
+    }
+
+    private static void observe(Measure measure, JudgedZone zone, boolean replaced, List<Observation> into) {
+        measure.of(zone.survey(), zone.assessment()).ifPresent((Estimate value) -> into.add(new Observation(
+                Instant.ofEpochMilli(zone.copy().moment()), value.value(), value.standardUncertainty(),
+                zone.copy().id(), zone.copy().revision(), replaced)));
+    }
+
+    /** The depth does not mind new seals; everything else minds every change. */
+    private static Instant begun(Measure measure, List<Change> changes) {
+        Set<Change.Kind> minded = switch (measure) {
+            case DEPTH -> Set.of(Change.Kind.MATERIAL, Change.Kind.SPEED, Change.Kind.BOARDS);
+            case SEALS -> Set.of(Change.Kind.SEALS);
+            case DRAG, POWER -> Set.of(Change.Kind.values());
+        };
+        return changes.stream().filter(change -> minded.contains(change.kind())).map(Change::at)
+                .reduce((one, other) -> one.isAfter(other) ? one : other).orElse(Instant.EPOCH);
+    }
+}

@@ -1,0 +1,160 @@
+package bedmark.command;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.command.Terminal.Result;
+import bedmark.json.JsonReader;
+import bedmark.office.Offices;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** The commands of the office as a script calls them. */
+class OfficeCommandsTest {
+    @TempDir
+    private Path folder;
+
+    private Path packs;
+
+    @BeforeEach
+    void packs() {
+        packs = folder.resolve("packs");
+        Offices.pack(Offices.sample("round-under-way"), folder.resolve("tablet"), packs.resolve("a.zip"));
+        Offices.pack(Offices.sample("round-2026-03"), folder.resolve("tablet"), packs.resolve("b.zip"));
+    }
+
+    private Result office(String... arguments) {
+        List<String> all = new ArrayList<>(List.of("office"));
+        all.addAll(List.of(arguments));
+        all.addAll(List.of("--store", folder.resolve("office").toString()));
+        return Terminal.run(all.toArray(String[]::new));
+    }
+
+    private Result received() {
+        return office("receive", packs.toString(), "--trust", Offices.fingerprint(folder.resolve("tablet")));
+    }
+
+    @Test
+    void anUnknownDeviceIsRefusedAndATrustedOneReceivedWithReceipts() throws IOException {
+        Result refused = office("receive", packs.resolve("a.zip").toString());
+        assertEquals(3, refused.code());
+        assertTrue(refused.err().contains(Offices.fingerprint(folder.resolve("tablet"))), refused::err);
+        assertEquals(1, refused.err().lines().count());
+        assertEquals(2, office("receive", packs.toString(), "--trust", "nonsense").code());
+        Result received = received();
+        assertEquals(0, received.code(), received::err);
+        try (var files = Files.list(packs)) {
+            assertEquals(2, files.filter(file -> file.toString().endsWith(".receipt.json")).count());
+        }
+        Result again = office("receive", packs.toString());
+        assertEquals(0, again.code());
+        assertTrue(again.out().contains("received before"), again::out);
+    }
+
+    @Test
+    void theListTellsItsWorstPlaceByTheExitCode() {
+        received();
+        Result text = office("rank", "--limit", "3");
+        assertEquals(1, text.code(), text::err);
+        assertTrue(text.out().startsWith("1. Overloaded: "), text::out);
+        Result json = office("rank", "--json");
+        assertEquals(24, json.out().lines().count());
+        json.out().lines().forEach(line -> JsonReader.read(line.getBytes(StandardCharsets.UTF_8)));
+        Result csv = office("rank", "--csv");
+        assertEquals(25, csv.out().split("\r\n").length);
+        assertTrue(office("rank", "--finding", "seal-defect").out().lines().filter(line ->
+                line.contains("State of the seals")).count() > 1);
+        assertEquals(2, office("rank", "--finding", "moon").code());
+        assertEquals(2, office("rank", "--stale-after", "0").code());
+        assertTrue(office("rank", "--area", "Biomass yard").out().lines().noneMatch(line -> line.contains("C3")));
+    }
+
+    @Test
+    void aFindingIsAcceptedWithReasonPersonAndDay() {
+        received();
+        String worst = JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8))
+                .root().text("transfer").orElseThrow();
+        String rule = JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8))
+                .root().branches("findings").get(0).text("code").orElseThrow();
+        assertEquals(2, office("accept", worst, rule).code());
+        assertEquals(3, office("accept", worst, rule, "--reason", "r", "--until", "2020-01-01").code());
+        assertEquals(3, office("accept", worst, rule, "--reason", "r", "--shelve").code());
+        assertEquals(3, office("accept", "TP-77", rule, "--reason", "r").code());
+        Result accepted = office("accept", worst, rule, "--reason", "boards on order", "--until", "2026-12-31",
+                "--person", "Ida Marsh");
+        assertEquals(0, accepted.code(), accepted::err);
+        assertTrue(office("rank").out().contains("accepted by Ida Marsh, until 2026-12-31: boards on order"));
+        assertEquals(0, office("accept", worst, rule, "--reason", "again", "--reopen").code());
+        assertTrue(!office("rank").out().contains("boards on order"));
+    }
+
+    @Test
+    void actionsGoToTheMaintenanceSystemAndBackToTheTablets() {
+        received();
+        Result added = office("action", "TP-08", "--text", "Renew the seals", "--owner", "Otto Vane", "--due",
+                "2026-11-01", "--work-order", "WO-1", "--person", "Ida Marsh");
+        assertEquals(0, added.code(), added::err);
+        String csv = office("action").out();
+        assertTrue(csv.contains("OST-LZ-008") && csv.contains("WO-1") && csv.contains("2026-11-01"), csv);
+        assertEquals(0, office("action", "--change", added.out().strip().substring(0, 8), "--done").code());
+        assertTrue(office("action").out().contains("WO-1,true"));
+        Path round = folder.resolve("next.round.json");
+        assertEquals(0, office("round", "--out", round.toString()).code());
+        assertEquals(3, office("round", "--out", round.toString(), "--round", "never").code());
+    }
+
+    @Test
+    void trendEnergyAndExportAreTold() {
+        received();
+        Result trend = office("trend", "TP-08");
+        assertEquals(0, trend.code(), trend::err);
+        assertTrue(trend.out().contains("Too few surveys to say"), trend::out);
+        JsonReader.read(office("trend", "TP-08", "--json").out().getBytes(StandardCharsets.UTF_8));
+        assertEquals(3, office("trend", "TP-99").code());
+        assertTrue(office("energy").out().startsWith("##"));
+        assertTrue(office("energy", "--by-area", "--csv").out().lines().count() >= 4);
+        Result export = office("export", "--out", folder.resolve("export").toString());
+        assertEquals(0, export.code(), export::err);
+        assertEquals(3, office("export", "--out", folder.resolve("export").toString()).code());
+    }
+
+    @Test
+    void aRegisterComesAsTablesAndGoesAsTables() throws IOException {
+        received();
+        Path tables = folder.resolve("tables");
+        assertEquals(0, office("export-register", "--out", tables.toString()).code());
+        Result same = office("import-register", tables.toString(), "--check");
+        assertEquals(0, same.code(), same::err);
+        assertTrue(same.out().contains("0 changed"), same::out);
+        Files.writeString(tables.resolve("transfers.csv"), "id,conveyor,skirtSpacing\nTP-01,C1,800 mm\nTP-02,C77,1\n");
+        Result bad = office("import-register", tables.resolve("transfers.csv").toString());
+        assertEquals(3, bad.code());
+        assertTrue(bad.err().contains("transfers.csv:3 conveyor") && bad.err().contains("transfers.csv:3 skirtSpacing"),
+                bad::err);
+        assertTrue(office("export-register", "--out", folder.resolve("after").toString()).code() == 0);
+        assertTrue(Files.readString(folder.resolve("after/transfers.csv")).contains("TP-01"));
+        assertTrue(!Files.readString(folder.resolve("after/transfers.csv")).contains("800 mm"));
+        Result fresh = office("import-register", "--plant", "newplant", Files.writeString(folder.resolve("areas.csv"),
+                "id;name\na1;North\n").toString());
+        assertEquals(0, fresh.code(), fresh::err);
+        assertEquals(3, office("round", "--out", folder.resolve("x.round.json").toString()).code(), "which plant?");
+    }
+
+    @Test
+    void everyCommandOfTheOfficeHasHelp() {
+        for (String command : List.of("receive", "rank", "trend", "energy", "accept", "action", "settle", "export",
+                "import-register", "export-register", "round")) {
+            Result help = Terminal.run("office", command, "--help");
+            assertEquals(0, help.code());
+            assertTrue(help.out().startsWith("Usage: bedmark office " + command), help::out);
+        }
+        assertEquals(2, Terminal.run("office").code());
+    }
+}

@@ -1,0 +1,140 @@
+package bedmark.office.trend;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.document.Branch;
+import bedmark.document.Node;
+import bedmark.office.JudgedZone;
+import bedmark.survey.Assessor;
+import bedmark.survey.InspectionStatus;
+import bedmark.survey.Plants;
+import bedmark.survey.Register;
+import bedmark.survey.Survey;
+import bedmark.survey.merge.Copy;
+import bedmark.survey.merge.Origin;
+import bedmark.survey.merge.ZoneId;
+import java.time.LocalDate;
+import java.time.ZoneOffset;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalLong;
+import java.util.UUID;
+import org.junit.jupiter.api.Test;
+
+/** One loading zone over time, from surveys that are judged as any other. */
+class ZoneTrendTest {
+    private static final ZoneId ZONE = new ZoneId("p", "t3");
+    private static final Register REGISTER = register();
+
+    private static Register register() {
+        Branch plant = Plants.register("").document();
+        List<Node> transfers = new ArrayList<>();
+        plant.branches("transfers").forEach(transfer -> transfers.add(transfer.with("designBedDepth",
+                Plants.read("{'value':200,'unit':'mm'}"))));
+        return new Register(plant.with("transfers", new Node.Series(transfers)));
+    }
+
+    private static JudgedZone survey(LocalDate day, int depthMm, String more) {
+        Survey survey = Plants.survey("t3", "'bedDepths':[{'position':{'value':3,'unit':'m'},'depth':{'value':"
+                + depthMm + ",'unit':'mm'}}]" + more);
+        long moment = day.atStartOfDay(ZoneOffset.UTC).toInstant().toEpochMilli();
+        Copy copy = new Copy(day.toString() + depthMm, UUID.nameUUIDFromBytes(day.toString().getBytes()), 1,
+                Optional.empty(), ZONE, "r", InspectionStatus.INSPECTED, OptionalLong.empty(), OptionalLong.of(moment),
+                new Origin(moment, "x", "c2"));
+        return new JudgedZone(ZONE, copy, survey, REGISTER, new Assessor(REGISTER).assess(survey, List.of()));
+    }
+
+    private static List<JudgedZone> rising(int surveys) {
+        List<JudgedZone> zones = new ArrayList<>();
+        for (int i = 0; i < surveys; i++) {
+            zones.add(survey(LocalDate.of(2025, 1, 1).plusMonths(i), 100 + 10 * i, ""));
+        }
+        return zones;
+    }
+
+    private static Series depth(ZoneTrend trend) {
+        return trend.series().stream().filter(one -> one.measure() == Measure.DEPTH).findFirst().orElseThrow();
+    }
+
+    @Test
+    void aRisingBedSaysWhenItWillBeOverloaded() {
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(8), List.of());
+        Series depth = depth(trend);
+        assertEquals(0.22, depth.near().getAsDouble(), 1e-12);
+        assertEquals(0.25, depth.overloaded().getAsDouble(), 1e-12);
+        Outlook.Trend outlook = assertInstanceOf(Outlook.Trend.class, depth.outlook());
+        assertEquals(0.01 / 30.4, outlook.line().slope(), 2e-5);
+        // 170 mm on 1 August, 10 mm a month: 220 mm in January, 250 mm in April.
+        Outlook.Reached overloaded = outlook.overloaded().orElseThrow();
+        assertTrue(Math.abs(overloaded.expected().toEpochDay() - LocalDate.of(2026, 4, 1).toEpochDay()) < 10);
+        assertTrue(!overloaded.earliest().isAfter(overloaded.expected()));
+        assertTrue(!overloaded.latest().orElseThrow().isBefore(overloaded.expected()));
+        assertTrue(outlook.near().orElseThrow().expected().isBefore(overloaded.expected()));
+        assertEquals(Interval.Reason.HALF_OF_PF, trend.interval().reason());
+        assertEquals(0.03 / outlook.line().upper(), trend.interval().pfDays().getAsDouble(), 1e-9);
+        assertEquals((int) (trend.interval().pfDays().getAsDouble() / 2), trend.interval().days());
+    }
+
+    @Test
+    void fourSurveysAreTooFewToSay() {
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(4), List.of());
+        assertEquals(new Outlook.TooFew(4, 5), depth(trend).outlook());
+        assertEquals(Interval.Reason.TOO_FEW, trend.interval().reason());
+        assertEquals(Interval.MOST, trend.interval().days());
+    }
+
+    @Test
+    void anotherMaterialBeginsAnotherStory() {
+        List<JudgedZone> zones = rising(7);
+        zones.add(survey(LocalDate.of(2025, 8, 1), 60, ",'materialRunning':'coal'"));
+        zones.add(survey(LocalDate.of(2025, 9, 1), 62, ",'materialRunning':'coal'"));
+        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of());
+        assertEquals(List.of(Change.Kind.MATERIAL), trend.changes().stream().map(Change::kind).toList());
+        assertEquals(new Outlook.TooFew(2, 5), depth(trend).outlook());
+        assertEquals(9, depth(trend).observations().size(), "what was before is still shown");
+    }
+
+    @Test
+    void anotherSpeedOrOtherSealsAreMarked() {
+        List<JudgedZone> zones = rising(2);
+        zones.add(survey(LocalDate.of(2025, 8, 1), 110, ",'beltSpeed':{'value':3,'unit':'m/s'}"));
+        zones.add(survey(LocalDate.of(2025, 9, 1), 110, ",'beltSpeed':{'value':3,'unit':'m/s'},'seals':[{'side':'left',"
+                + "'type':'oblique','condition':'sound','length':{'value':6,'unit':'m'}},{'side':'right',"
+                + "'type':'oblique','condition':'worn','length':{'value':6,'unit':'m'}}]"));
+        zones.add(survey(LocalDate.of(2025, 10, 1), 110, ",'beltSpeed':{'value':3.1,'unit':'m/s'},'seals':[{'side':"
+                + "'left','type':'oblique','condition':'sound','length':{'value':6,'unit':'m'}},{'side':'right',"
+                + "'type':'oblique','condition':'sound','length':{'value':6,'unit':'m'}}],"
+                + "'skirtSpacing':{'value':800,'unit':'mm'}"));
+        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of());
+        assertEquals(List.of(Change.Kind.SPEED, Change.Kind.SEALS, Change.Kind.SEALS, Change.Kind.BOARDS),
+                trend.changes().stream().map(Change::kind).toList());
+    }
+
+    @Test
+    void aBedThatStaysHasNoTrendAndAFallingOneNoDate() {
+        List<JudgedZone> steady = new ArrayList<>();
+        List<JudgedZone> falling = new ArrayList<>();
+        int[] depths = {120, 118, 122, 119, 121, 120, 118};
+        for (int i = 0; i < depths.length; i++) {
+            steady.add(survey(LocalDate.of(2025, 1, 1).plusMonths(i), depths[i], ""));
+            falling.add(survey(LocalDate.of(2025, 1, 1).plusMonths(i), 200 - 10 * i, ""));
+        }
+        assertInstanceOf(Outlook.Level.class, depth(ZoneTrend.of(ZONE, steady, List.of())).outlook());
+        Outlook.Trend trend = assertInstanceOf(Outlook.Trend.class,
+                depth(ZoneTrend.of(ZONE, falling, List.of())).outlook());
+        assertTrue(trend.line().slope() < 0);
+        assertTrue(trend.overloaded().isEmpty());
+        assertEquals(Interval.Reason.NO_TREND, ZoneTrend.of(ZONE, falling, List.of()).interval().reason());
+    }
+
+    @Test
+    void aReplacedSurveyIsShownAndNotCounted() {
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(5), List.of(survey(LocalDate.of(2025, 3, 2), 400, "")));
+        assertEquals(6, depth(trend).observations().size());
+        Outlook.Trend outlook = assertInstanceOf(Outlook.Trend.class, depth(trend).outlook());
+        assertEquals(10, outlook.test().s());
+    }
+}

@@ -5,7 +5,10 @@ import bedmark.command.Surroundings;
 import bedmark.diary.Diary;
 import bedmark.diary.Happening;
 import bedmark.index.Store;
+import bedmark.office.OfficeOptions;
+import bedmark.office.OfficeStore;
 import bedmark.screen.BedmarkApp;
+import bedmark.screen.office.OfficeApp;
 import bedmark.words.Words;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
@@ -41,6 +44,9 @@ public final class Bedmark {
         }
         TOOLKIT.setLevel(Level.SEVERE);
         Clock clock = Clock.systemDefaultZone();
+        if (OfficeStore.isOffice(folder)) {
+            return OfficeApp.open(OfficeStore.open(folder, OfficeOptions.of(clock)), clock);
+        }
         try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
             Diary diary = new Diary(folder, clock);
             Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> diary.note(failure));

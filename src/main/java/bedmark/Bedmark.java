@@ -2,9 +2,9 @@ package bedmark;
 
 import bedmark.command.BedmarkCommand;
 import bedmark.command.Surroundings;
-import bedmark.diary.Diary;
-import bedmark.diary.Happening;
 import bedmark.index.Store;
+import bedmark.index.StoreFolder;
+import bedmark.index.StoreOptions;
 import bedmark.office.OfficeOptions;
 import bedmark.office.OfficeStore;
 import bedmark.screen.BedmarkApp;
@@ -15,7 +15,6 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
-import java.util.Map;
 import java.util.Optional;
 import java.util.logging.Level;
 import java.util.logging.Logger;
@@ -47,13 +46,14 @@ public final class Bedmark {
         if (OfficeStore.isOffice(folder)) {
             return OfficeApp.open(OfficeStore.open(folder, OfficeOptions.of(clock)), clock);
         }
-        try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
-            Diary diary = new Diary(folder, clock);
-            Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> diary.note(failure));
-            diary.note(Happening.STORE_OPENED, Map.of());
-            boolean shown = BedmarkApp.open(store, diary, clock, samples, load);
-            diary.note(Happening.STORE_CLOSED, Map.of());
-            return shown;
+        BedmarkApp.prepare();
+        StoreOptions options = BedmarkApp.options(clock);
+        if (new StoreFolder(folder, options).sealed()) {
+            return BedmarkApp.unlock(folder, passphrase -> Store.open(folder,
+                    options.withPassphrase(Optional.of(passphrase))), clock, samples);
+        }
+        try (Store store = Store.open(folder, options)) {
+            return BedmarkApp.open(store, clock, samples, load);
         }
     }
 }

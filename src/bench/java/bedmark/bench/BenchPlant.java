@@ -11,7 +11,8 @@ final class BenchPlant {
     }
 
     static String bundle(int zones) {
-        return ("{'format':'bedmark.bundle','version':1,'plant':{'id':'p','name':'Demo','materials':[{'id':'m',"
+        return ("{'format':'bedmark.bundle','version':1,'id':'" + new UUID(2, zones) + "',"
+                + "'createdAt':'2026-03-02T15:00:00Z','plant':{'id':'p','name':'Demo','materials':[{'id':'m',"
                 + "'skirtFrictionFactor':0.0754,'bulkDensity':{'value':1000,'unit':'kg/m3'},"
                 + "'angleOfRepose':{'value':38,'unit':'deg'},'surchargeAngle':{'value':20,'unit':'deg'},"
                 + "'wallFriction':0.5,'speedClass':'coal-soft-ore-fine-stone'}],'conveyors':["
@@ -41,7 +42,8 @@ final class BenchPlant {
     private static String survey(int turn) {
         String stations = IntStream.range(0, 4).mapToObj(i -> "{'position':" + quantity(0.75 + 1.5 * i, "m")
                 + ",'depth':" + quantity(100 + (turn * 7 + i * 13) % 250, "mm") + "}").collect(Collectors.joining(","));
-        return "{'id':'" + new UUID(1, turn) + "','transfer':'t" + turn + "','readings':{'loadingZoneLength':"
+        return "{'id':'" + new UUID(1, turn) + "','transfer':'t" + turn + "','startedAt':'2026-03-02T08:00:00Z',"
+                + "'completedAt':'2026-03-02T08:10:00Z','readings':{'loadingZoneLength':"
                 + quantity(6, "m") + ",'beltSpeed':" + quantity(2, "m/s") + ",'depthMethod':'at-board','bedDepths':["
                 + stations + "],'seals':[{'side':'left','type':'vertical','condition':'sound','length':"
                 + quantity(6, "m") + "},{'side':'right','type':'oblique','condition':'worn','length':"

@@ -1,6 +1,5 @@
 package bedmark.bench;
 
-import bedmark.diary.Diary;
 import bedmark.index.Store;
 import bedmark.screen.BedmarkApp;
 import java.lang.management.ManagementFactory;
@@ -41,8 +40,9 @@ public final class StartProbe {
         }
         Clock clock = Clock.systemUTC();
         Path folder = Path.of(arguments[1]);
+        BedmarkApp.prepare();
         try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
-            BedmarkApp.open(store, new Diary(folder, clock), clock, Optional.empty(), false);
+            BedmarkApp.open(store, clock, Optional.empty(), false);
         }
     }
 

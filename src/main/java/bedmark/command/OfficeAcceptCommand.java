@@ -64,7 +64,7 @@ final class OfficeAcceptCommand implements Callable<Integer> {
                 findings.answer(zone, known, shelve ? OfficeDeed.Answer.SHELVED : OfficeDeed.Answer.ACCEPTED, reason,
                         desk.person(), until, LocalDate.now(surroundings.clock()));
             }
-            progress.close();
+            progress.done();
             surroundings.out().println(surroundings.words().text("office.accept." + (reopen ? "reopened"
                     : shelve ? "shelved" : "accepted"), transfer, surroundings.words().text("rule." + rule),
                     until.map(LocalDate::toString).orElse("-")));

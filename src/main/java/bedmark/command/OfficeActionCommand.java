@@ -61,12 +61,12 @@ final class OfficeActionCommand implements Callable<Integer> {
                         workOrder.orElse(old.workOrder()), done || old.done()), desk.person());
             } else if (transfer.isPresent()) {
                 ZoneId zone = OfficeDesk.zone(store, transfer.get());
-                progress.close();
+                progress.done();
                 surroundings.out().println(actions.add(zone, finding.orElse(""), text.orElse(""), owner.orElse(""),
                         due, workOrder.orElse(""), desk.person()));
                 return ExitCode.FINE;
             }
-            progress.close();
+            progress.done();
             surroundings.out().print(actions.csv());
             return ExitCode.FINE;
         }

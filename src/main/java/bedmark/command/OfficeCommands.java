@@ -19,6 +19,7 @@ final class OfficeCommands {
                 .addSubcommand(new OfficeExportCommand(surroundings))
                 .addSubcommand(new OfficeImportRegisterCommand(surroundings))
                 .addSubcommand(new OfficeExportRegisterCommand(surroundings))
-                .addSubcommand(new OfficeRoundCommand(surroundings));
+                .addSubcommand(new OfficeRoundCommand(surroundings))
+                .addSubcommand(new OfficeReportCommand(surroundings));
     }
 }

@@ -29,7 +29,7 @@ final class OfficeExportCommand implements Callable<Integer> {
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
             long surveys = new OfficeExport(store).write(out, progress::at);
-            progress.close();
+            progress.done();
             surroundings.out().println(surroundings.words().text("office.exported", out, surveys));
         }
         return ExitCode.FINE;

@@ -44,7 +44,7 @@ final class OfficeExportRegisterCommand implements Callable<Integer> {
             for (Map.Entry<String, String> file : files.entrySet()) {
                 Files.writeString(out.resolve(file.getKey()), file.getValue());
             }
-            progress.close();
+            progress.done();
             surroundings.out().println(surroundings.words().text("office.register.written", out, files.size()));
             return ExitCode.FINE;
         } catch (IOException e) {

@@ -66,7 +66,7 @@ final class OfficeImportRegisterCommand implements Callable<Integer> {
                 progress)) {
             RegisterDesk register = new RegisterDesk(store);
             Draft draft = RegisterImport.draft(register.head(plant, forms()), tables, map);
-            progress.close();
+            progress.done();
             draft.mapping().forEach(this::tell);
             if (!draft.sound()) {
                 draft.defects().forEach(defect -> surroundings.err().println("bedmark: "

@@ -64,7 +64,7 @@ final class OfficeReceiveCommand implements Callable<Integer> {
                 progress)) {
             fingerprints.forEach(fingerprint -> store.trust(fingerprint, "", desk.person()));
             List<Received> received = store.receive(files, desk.person(), progress::at);
-            progress.close();
+            progress.done();
             received.forEach(one -> tell(store, one));
             return exitCode(received);
         }

@@ -35,7 +35,7 @@ final class OfficeSettleCommand implements Callable<Integer> {
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
             new Findings(store).settle(OfficeDesk.zone(store, transfer), side, reason, desk.person());
-            progress.close();
+            progress.done();
             surroundings.out().println(surroundings.words().text("office.settled", transfer, side));
         }
         return ExitCode.FINE;

@@ -24,13 +24,17 @@ final class ProgressLine implements AutoCloseable {
         }
     }
 
-    /** Clears the line. */
-    @Override
-    public void close() {
+    /** Clears the line, since what comes next is no progress. */
+    void done() {
         if (last >= 0) {
             err.print("\r      \r");
             err.flush();
             last = -1;
         }
+    }
+
+    @Override
+    public void close() {
+        done();
     }
 }

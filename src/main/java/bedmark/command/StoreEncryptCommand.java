@@ -16,7 +16,7 @@ import picocli.CommandLine.Parameters;
 /** Turns encryption on for a store, or changes its passphrase. */
 @Command(name = "encrypt", mixinStandardHelpOptions = true,
         description = "Encrypts a store's journal, photos and index under a passphrase; with --change, changes the "
-                + "passphrase of one that is encrypted. A lost passphrase can not be recovered, by nobody.",
+                + "passphrase of one that is encrypted. A lost passphrase can not be recovered by anybody.",
         footer = {"", "What lay there unencrypted is deleted, but a memory chip may keep traces of it until it is used",
             "again. Backups that were made before stay as they were made.",
             "Exit codes: 0 done; 3 not done, with the reason in one line."})

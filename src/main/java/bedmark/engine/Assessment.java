@@ -47,7 +47,8 @@ public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> resu
         Map<DragMethod, Estimate> methods, Optional<MethodSpread> spread, Optional<EnergyKind> energyKind,
         Optional<String> currency, List<DepthPoint> profile, Level level,
         Optional<Level> levelAtDesignFeed, List<Finding> findings, List<Finding> findingsAtDesign,
-        List<RefusedVerdict> refused, List<AllowedDepth> allowedDepths, List<Remedy> remedies, List<Assumption> assumptions, List<String> missing,
+        List<RefusedVerdict> refused, List<AllowedDepth> allowedDepths, List<Remedy> remedies,
+        List<Assumption> assumptions, List<String> missing,
         List<String> missingRequired, List<Side> sidesWithoutSeals, List<Share> powerShares,
         Optional<Component> leading, Optional<Repeat> repeat) {
 
@@ -108,9 +109,9 @@ public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> resu
     public Assessment with(Assumption assumption) {
         List<Assumption> more = new ArrayList<>(assumptions);
         more.add(assumption);
-        return new Assessment(method, results, methods, spread, energyKind, currency, profile, level, levelAtDesignFeed, findings,
-                findingsAtDesign, refused, allowedDepths, remedies, more, missing, missingRequired, sidesWithoutSeals,
-                powerShares, leading, repeat);
+        return new Assessment(method, results, methods, spread, energyKind, currency, profile, level,
+                levelAtDesignFeed, findings, findingsAtDesign, refused, allowedDepths, remedies, more, missing,
+                missingRequired, sidesWithoutSeals, powerShares, leading, repeat);
     }
 
     /** The depth that may not be overstepped at the board and the rule that sets it, where one is known. */

@@ -4,8 +4,8 @@ import java.util.List;
 
 /**
  * What the skirts of all zones of a conveyor ask of its drive in every trial of a {@link Hypercube}, as shares of the
- * rated power. A method that errs does so in all zones alike: the disagreement of the methods, where it counts, is drawn
- * evenly over their range.
+ * rated power. A method that errs does so in all zones alike: the disagreement of the methods, where it counts, is
+ * drawn evenly over their range.
  */
 record DrawnLoad(double[] today, double[] atDesign) {
 

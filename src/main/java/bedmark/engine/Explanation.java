@@ -161,7 +161,8 @@ final class Explanation {
             if (!whole) {
                 sheet.step(SpecialResistance.WITHIN, within, "m");
             }
-            sheet.step(key(DragMethod.ISO_5048), whole ? OF_FLOW.withSigns(Map.of("lw", "lb")) : OF_FLOW, methods.get(DragMethod.ISO_5048), "N");
+            sheet.step(key(DragMethod.ISO_5048), whole ? OF_FLOW.withSigns(Map.of("lw", "lb")) : OF_FLOW,
+                    methods.get(DragMethod.ISO_5048), "N");
         }
         sheet.step(key(DragMethod.SITE), SiteFactor.FORMULA, methods.get(DragMethod.SITE), "N");
         sheet.step(Result.MATERIAL_DRAG.key(), ZoneFormulas.materialDrag(today.method()), today.materialDrag(), "N");

@@ -85,8 +85,8 @@ final class Remedies {
     }
 
     /**
-     * A bed that lags is brought to belt speed, all along the zone: the same flow at one speed has one area, and with it
-     * one depth, whatever its shape was while it lagged. The mean area falls with the ratio of the two speeds.
+     * A bed that lags is brought to belt speed, all along the zone: the same flow at one speed has one area, and with
+     * it one depth, whatever its shape was while it lagged. The mean area falls with the ratio of the two speeds.
      */
     private Optional<Remedy> freeBed() {
         if (!breaches.contains(Rule.BED_BEHIND_BELT) || now.bedSpeedRatio().get().value() == 0) {

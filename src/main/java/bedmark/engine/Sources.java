@@ -54,7 +54,7 @@ final class Sources {
 
     /** The readings with their uncertainties. */
     static Sources uncertain(LoadingZone zone, Settings settings) {
-        Tape tape = new Tape(192 + 16 * zone.stations().size());
+        Tape tape = new Tape(232 + 12 * zone.stations().size());
         return new Sources(zone, settings, tape, tape::take);
     }
 

@@ -32,7 +32,8 @@ final class StationWorking {
     }
 
     private void station(int number, Station station, Uncertain level) {
-        Map<String, String> signs = Map.of("h", "h" + number, "D", "D" + number, "f", "f" + number, "s′", "s′" + number);
+        Map<String, String> signs = Map.of("h", "h" + number, "D", "D" + number, "f", "f" + number,
+                "s′", "s′" + number);
         Uncertain raw = Uncertain.exact(station.raw().value());
         String name = station.raw().name();
         switch (station.method()) {

@@ -89,7 +89,7 @@ final class HandOver {
 
     private void photos(Survey survey) throws IOException {
         for (Branch photo : survey.photos()) {
-            if (store.photo(photo).isPresent()) {
+            if (!PhotoShelf.isShelved(photo) || store.photo(photo).isPresent()) {
                 continue;
             }
             String name = photo.text("file").orElse("");

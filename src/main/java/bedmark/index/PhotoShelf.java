@@ -20,8 +20,8 @@ import java.util.UUID;
 import java.util.regex.Pattern;
 
 /**
- * The folder {@code photos/}: each file untouched, under its own digest, and only ever there as a whole. Where the store
- * has a key, each is sealed with it and bears a further ending; the digest is that of the photo itself.
+ * The folder {@code photos/}: each file untouched, under its own digest, and only ever there as a whole. Where the
+ * store has a key, each is sealed with it and bears a further ending; the digest is that of the photo itself.
  */
 final class PhotoShelf {
     static final String FOLDER = "photos";
@@ -65,6 +65,11 @@ final class PhotoShelf {
     /** Where the file of a photo lies; nothing where its document names none of this shelf. */
     Optional<Path> file(Branch photo) {
         return photo.text("file").filter(name -> FILE.matcher(name).matches()).map(this::onDisk);
+    }
+
+    /** Whether a photo's document names a file of a shelf at all; a survey from elsewhere may name others. */
+    static boolean isShelved(Branch photo) {
+        return photo.text("file").filter(name -> FILE.matcher(name).matches()).isPresent();
     }
 
     private Path onDisk(String name) {

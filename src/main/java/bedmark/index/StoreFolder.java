@@ -121,10 +121,15 @@ public final class StoreFolder {
         Desk desk = new Desk("bedmark-folder");
         try (desk) {
             desk.call(() -> {
-                try (Closeable lock = files.lock(folder.resolve(Store.LOCK)).orElseThrow(() ->
-                        new Refused(Defect.in(folder.toString(), "store-locked")))) {
-                    work.run();
-                    return true;
+                try {
+                    Closeable lock = files.lock(folder.resolve(Store.LOCK)).orElseThrow(() ->
+                            new Refused(Defect.in(folder.toString(), "store-locked")));
+                    try {
+                        work.run();
+                        return true;
+                    } finally {
+                        lock.close();
+                    }
                 } catch (IOException e) {
                     throw new Refused(Fault.defect("store", e, files, folder), e);
                 }

@@ -5,7 +5,8 @@ import java.util.stream.Collectors;
 
 /**
  * Rows of CSV as RFC 4180 has them, for spreadsheets: numbers plain with a decimal point, and a text that a spreadsheet
- * would take for a formula with an apostrophe before it.
+ * would take for a formula with an apostrophe before it. A text that begins with an apostrophe gets another one, so
+ * that a reader who takes one away from each cell that has one has read exactly what was written.
  */
 public final class Csv {
     private Csv() {
@@ -18,7 +19,7 @@ public final class Csv {
 
     private static String cell(String text) {
         boolean number = text.matches("-?[0-9]+(\\.[0-9]+)?(E-?[0-9]+)?");
-        String safe = !number && text.matches("(?s)[=+@\\-\\t\\r].*") ? "'" + text : text;
+        String safe = !number && text.matches("(?s)['=+@\\-\\t\\r\\n\uFF1D\uFF0B\uFF0D\uFF20].*") ? "'" + text : text;
         return safe.matches("(?s).*[\",\\r\\n].*") ? "\"" + safe.replace("\"", "\"\"") + "\"" : safe;
     }
 }

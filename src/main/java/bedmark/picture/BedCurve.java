@@ -47,6 +47,20 @@ public record BedCurve(List<Knot> knots) {
         return Optional.of(new BedCurve(knots));
     }
 
+    /** The depth (m) at a position (m) of the zone. */
+    public double depthAt(double position) {
+        Knot before = knots.get(0);
+        for (Knot knot : knots) {
+            if (knot.position() >= position) {
+                double apart = knot.position() - before.position();
+                double share = apart > 0 ? (position - before.position()) / apart : 0;
+                return before.depth() + share * (knot.depth() - before.depth());
+            }
+            before = knot;
+        }
+        return before.depth();
+    }
+
     /** The greatest depth (m). */
     public double deepest() {
         return knots.stream().mapToDouble(Knot::depth).max().orElseThrow();

@@ -24,6 +24,12 @@ import java.util.function.DoubleFunction;
 public record Captions(String feed, String beltSpeed, String boardTop, String boardTopWord, String zoneLength,
                        String limit, String limitWord, DoubleFunction<String> heights, Optional<String> prompt,
                        String clearWidth, String sectionTitle, String sectionNote) {
+    /** The same with other words beside the arrow of the belt's travel. */
+    public Captions withBeltSpeed(String words) {
+        return new Captions(feed, words, boardTop, boardTopWord, zoneLength, limit, limitWord, heights, prompt,
+                clearWidth, sectionTitle, sectionNote);
+    }
+
     public Captions {
         Objects.requireNonNull(feed);
         Objects.requireNonNull(beltSpeed);

@@ -15,12 +15,19 @@ final class Draft {
 
     private final Sheet sheet;
     private final TextMeasure measure;
+    private final boolean still;
     private final List<Mark> marks = new ArrayList<>();
     private final List<Box> taken = new ArrayList<>();
 
-    Draft(Sheet sheet, TextMeasure measure) {
+    /** @param still whether nobody takes hold of anything */
+    Draft(Sheet sheet, TextMeasure measure, boolean still) {
         this.sheet = sheet;
         this.measure = measure;
+        this.still = still;
+    }
+
+    boolean still() {
+        return still;
     }
 
     /** How a text is written. */
@@ -103,9 +110,14 @@ final class Draft {
         take(box);
     }
 
-    /** Breaks a text at its spaces into lines that fit a width; a word that is wider stands alone. */
+    /** Breaks a text at its line ends and spaces into lines that fit a width; a word that is wider stands alone. */
     List<String> lines(String text, Style style, double room) {
         List<String> lines = new ArrayList<>();
+        text.lines().forEach(line -> wrap(line, style, room, lines));
+        return lines.isEmpty() ? List.of("") : lines;
+    }
+
+    private void wrap(String text, Style style, double room, List<String> lines) {
         String line = "";
         for (String word : text.split(" ")) {
             String longer = line.isEmpty() ? word : line + " " + word;
@@ -116,7 +128,6 @@ final class Draft {
             line = longer;
         }
         lines.add(line);
-        return lines;
     }
 
     void take(Box box) {

@@ -125,6 +125,10 @@ final class SectionView {
             draft.add(new Mark.Line(places(section.surface(allowed)), draft.dashes(Ink.INK, 0.27)));
         }
         draft.add(new Mark.Line(places(section.surface(depth)), draft.pen(Ink.INK, 0.45)));
+        OptionalInt shown = ZoneSketch.shown(sketch.stations());
+        sketch.asIf().filter(curve -> shown.isPresent()).ifPresent(curve -> draft.add(new Mark.Line(
+                places(section.surface(curve.depthAt(sketch.stations().get(shown.getAsInt()).position()))),
+                draft.dashes(Ink.ACCENT, 0.45))));
     }
 
     private void boards() {
@@ -209,5 +213,16 @@ final class SectionView {
                     Optional.of(new Mark.Gap(centre - half, centre + half)), pen));
         }
         draft.writeCentred(text, style, centre, middle);
+        if (known && beltKnown) {
+            freeEdge(right, middle);
+        }
+    }
+
+    /** The belt's edge that lies free beyond the board, on the same line as the clear width. */
+    private void freeEdge(Point board, double middle) {
+        Point tip = new Point(place(section.tip(), 0).x(), middle);
+        if (tip.x() - board.x() > draft.mm(1)) {
+            draft.add(new Mark.Dimension(board, tip, draft.mm(1.2), Optional.empty(), draft.pen(Ink.SOFT, 0.2)));
+        }
     }
 }

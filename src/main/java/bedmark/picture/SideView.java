@@ -37,6 +37,7 @@ final class SideView {
         boardOutline();
         limitLine();
         bed.ifPresent(curve -> draft.add(new Mark.Line(surface(curve), draft.pen(Ink.INK, SURFACE))));
+        sketch.asIf().ifPresent(curve -> draft.add(new Mark.Line(surface(curve), draft.dashes(Ink.ACCENT, SURFACE))));
         belt();
         new SideWords(sketch, layout, draft).write(bed.isEmpty());
         new StationMarks(sketch.stations(), layout, draft).draw();

@@ -64,7 +64,8 @@ final class SideWords {
         double middle = layout.headerMiddle(draft);
         double inset = draft.mm(4.2);
         feed(fromLeft ? plot.x() + inset : plot.right() - inset, middle, fromLeft);
-        Draft.Style speed = Draft.Style.WORD.bold().when(sketch.belt().speed().isPresent());
+        Draft.Style known = Draft.Style.WORD.bold().when(sketch.belt().speed().isPresent());
+        Draft.Style speed = sketch.asIf().isPresent() ? new Draft.Style(known.face(), known.mm(), Ink.ACCENT) : known;
         double width = draft.width(captions.beltSpeed(), speed) + draft.mm(3.6);
         double taken = inset + draft.mm(2.2 + 3) + draft.width(captions.feed(), Draft.Style.WORD);
         double centred = plot.centre().x() - width / 2;

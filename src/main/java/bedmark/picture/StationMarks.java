@@ -17,6 +17,8 @@ final class StationMarks {
     private static final double RADIUS = 2.3;
     private static final double ACTIVE_RADIUS = 3.1;
     private static final double LEAST_RADIUS = 1.2;
+    /** Of a station that nobody pulls. */
+    private static final double STILL_RADIUS = 0.7;
     private static final double PAD = 0.8;
     private static final double PLATE = 4.3;
 
@@ -71,7 +73,10 @@ final class StationMarks {
         double apart = IntStream.range(0, stations.size()).filter(other -> other != index)
                 .mapToDouble(other -> Math.abs(scale.x(stations.get(other).position()) - centre(index).x()))
                 .min().orElse(Double.MAX_VALUE);
-        double radius = draft.mm(stations.get(index).active() ? ACTIVE_RADIUS : RADIUS);
+        double radius = draft.mm(draft.still() ? STILL_RADIUS : stations.get(index).active() ? ACTIVE_RADIUS : RADIUS);
+        if (draft.still()) {
+            return radius;
+        }
         return Math.max(draft.mm(LEAST_RADIUS), Math.min(radius, 0.46 * apart));
     }
 
@@ -88,6 +93,9 @@ final class StationMarks {
         double radius = radius(index);
         Pen edge = read || active ? draft.pen(Ink.INK, 0.34) : draft.dashes(Ink.SOFT, 0.25);
         draft.add(new Mark.Disc(centre, radius, Optional.of(active ? Ink.ACCENT : Ink.PAPER), Optional.of(edge)));
+        if (draft.still()) {
+            return;
+        }
         Pen chevron = draft.pen(active ? Ink.GROUND : read ? Ink.INK : Ink.SOFT, 0.3);
         double wing = 0.3 * radius;
         double near = 0.22 * radius;

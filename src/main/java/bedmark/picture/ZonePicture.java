@@ -21,10 +21,11 @@ public final class ZonePicture {
     private final Drawing drawing;
     private final List<Handle> handles;
 
-    private ZonePicture(ZoneSketch sketch, Sheet sheet, TextMeasure measure, Optional<SideLayout> held) {
+    private ZonePicture(ZoneSketch sketch, Sheet sheet, TextMeasure measure, boolean still,
+                        Optional<SideLayout> held) {
         this.sheet = sheet;
         this.measure = measure;
-        Draft draft = new Draft(sheet, measure);
+        Draft draft = new Draft(sheet, measure, still);
         boolean stacked = sheet.width() < STACK_UNDER * sheet.height();
         double between = draft.mm(BETWEEN_MM);
         Box sideRoom = stacked ? new Box(0, 0, sheet.width(), sheet.height() * 0.56)
@@ -42,7 +43,7 @@ public final class ZonePicture {
             new SectionView(sketch, room, ground, draft).draw(dimension);
         } else {
             double ground = layout.scale().plot().bottom() + draft.mm(SideLayout.BELT / 2);
-            Box room = new Box(left, 0, sheet.width() - left, ground);
+            Box room = new Box(left, sheet.corner(), sheet.width() - left, ground - sheet.corner());
             new SectionView(sketch, room, ground, draft).draw(layout.rowMiddle(0, draft));
         }
         drawing = draft.finish();
@@ -51,12 +52,17 @@ public final class ZonePicture {
 
     /** Lays a sketch out on a sheet. */
     public static ZonePicture of(ZoneSketch sketch, Sheet sheet, TextMeasure measure) {
-        return new ZonePicture(sketch, sheet, measure, Optional.empty());
+        return new ZonePicture(sketch, sheet, measure, false, Optional.empty());
+    }
+
+    /** The same for a surface that nobody pulls on: stations are dots. */
+    public static ZonePicture still(ZoneSketch sketch, Sheet sheet, TextMeasure measure) {
+        return new ZonePicture(sketch, sheet, measure, true, Optional.empty());
     }
 
     /** The picture of a changed sketch in the same layout: what a person sees while pulling. */
     public ZonePicture pulledTo(ZoneSketch sketch) {
-        return new ZonePicture(sketch, sheet, measure, Optional.of(layout));
+        return new ZonePicture(sketch, sheet, measure, false, Optional.of(layout));
     }
 
     public Drawing drawing() {

@@ -18,9 +18,22 @@ import java.util.stream.IntStream;
  * @param seals    the seals of both sides
  * @param feedEnd  where the material comes on
  * @param captions the words and the formatted numbers
+ * @param asIf     the bed as it would lie under other conditions, drawn over the one that does
  */
 public record ZoneSketch(Boards boards, Belt belt, List<Station> stations, Optional<Limit> limit, Seals seals,
-                         FeedEnd feedEnd, Captions captions) {
+                         FeedEnd feedEnd, Captions captions, Optional<BedCurve> asIf) {
+
+    /** A zone as it is. */
+    public ZoneSketch(Boards boards, Belt belt, List<Station> stations, Optional<Limit> limit, Seals seals,
+                      FeedEnd feedEnd, Captions captions) {
+        this(boards, belt, stations, limit, seals, feedEnd, captions, Optional.empty());
+    }
+
+    /** The same zone, over it the bed that it would have at another belt speed, in words beside the arrow. */
+    public ZoneSketch asIf(BedCurve bed, String speed) {
+        return new ZoneSketch(boards, belt, stations, limit, seals, feedEnd, captions.withBeltSpeed(speed),
+                Optional.of(bed));
+    }
 
     /**
      * The skirtboards.
@@ -123,6 +136,7 @@ public record ZoneSketch(Boards boards, Belt belt, List<Station> stations, Optio
         Objects.requireNonNull(seals);
         Objects.requireNonNull(feedEnd);
         Objects.requireNonNull(captions);
+        Objects.requireNonNull(asIf);
     }
 
     /** The station whose cross-section is shown: the active one, else the deepest, else none. */

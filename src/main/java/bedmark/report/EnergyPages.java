@@ -10,12 +10,12 @@ import java.util.List;
 
 /** What the skirts take in a year, the greatest conveyor first: a bar each, the part that could be saved hatched. */
 final class EnergyPages {
-    private static final int BARS = 15;
-    private static final double ROW = 27;
+    private static final int BARS = 12;
+    private static final double ROW = 25;
     private static final double BAR = 12;
     private static final double NAMES = 118;
     private static final double AMOUNTS = 84;
-    private static final double HATCH = 4;
+    private static final double HATCH = 4.5;
 
     private final ReportContent content;
     private final ReportWords words;
@@ -72,6 +72,7 @@ final class EnergyPages {
         double wide = one.wh() * perWh;
         double saved = Math.min(wide, one.savingWh() * perWh);
         flow.leaf().fill(Ink.BED, x, top + 3, wide, BAR);
+        flow.leaf().fill(Ink.PAPER, x + wide - saved, top + 3, saved, BAR);
         hatch(x + wide - saved, top + 3, saved);
         flow.leaf().frame(Ink.INK, 0.8, x, top + 3, wide, BAR);
         flow.leaf().mutter(words.energy(one.wh()), Lettering.plain(9.5), x + wide + 6, top + 13);
@@ -92,7 +93,6 @@ final class EnergyPages {
         double x = flow.left() + NAMES;
         double y = flow.y() + 4;
         Lettering small = Lettering.plain(8.5).soft();
-        flow.leaf().fill(Ink.BED, x, y, 22, BAR);
         hatch(x, y, 22);
         flow.leaf().frame(Ink.INK, 0.8, x, y, 22, BAR);
         flow.booklet().tags().within("P", () ->
@@ -105,13 +105,13 @@ final class EnergyPages {
         all.forEach(one -> rows.add(row(name(one), one)));
         rows.add(row(words.text("report.whole"), ConveyorEnergy.whole(content.zones())).stream()
                 .map(Grid.Cell::bold).toList());
-        new Grid(flow, List.of(Grid.Column.text(words.text("report.column.conveyor"), 20),
+        new Grid(flow, List.of(Grid.Column.text(words.text("report.column.conveyor"), 18),
                 Grid.Column.text(words.text("report.column.area"), 24),
-                Grid.Column.number(words.text("report.column.zones"), 11),
+                Grid.Column.number(words.text("report.column.zones"), 13),
                 Grid.Column.number(words.text("report.column.energy"), 15),
-                Grid.Column.number(words.text("report.column.cost"), 14),
-                Grid.Column.number(words.text("report.column.co2"), 15),
-                Grid.Column.number(words.text("report.column.saving"), 15)), 8.8).set(rows);
+                Grid.Column.number(words.text("report.column.cost"), 13),
+                Grid.Column.number(words.text("report.column.co2"), 12),
+                Grid.Column.number(words.text("report.column.saving"), 17)), 8.4).set(rows);
         if (all.stream().anyMatch(ConveyorEnergy::shaft)) {
             flow.paragraph("P", words.text("report.shaft"), Lettering.plain(8.5).soft());
         }
@@ -123,7 +123,7 @@ final class EnergyPages {
                 Grid.Cell.of(words.energy(one.wh()) + (one.shaft() ? "*" : "")),
                 Grid.Cell.of(one.currency().map(currency -> words.money(one.cost().orElseThrow(), currency))
                         .orElse("–")),
-                Grid.Cell.of(one.co2().isPresent() ? words.tonnesOfCo2(one.co2().getAsDouble()) : "–"),
+                Grid.Cell.of(one.co2().isPresent() ? words.tonnes(one.co2().getAsDouble()) : "–"),
                 Grid.Cell.of(words.energy(one.savingWh())));
     }
 }

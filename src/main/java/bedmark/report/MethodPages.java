@@ -20,13 +20,15 @@ import java.util.stream.Stream;
 
 /** How the numbers came about, the limits in use with their sources, how sure they are, what to beware of. */
 final class MethodPages {
+    /** The source of a limit that the site set. */
+    private static final String OF_SITE = Limit.ofSite(OptionalDouble.empty(), OptionalDouble.empty()).source();
     private static final int METHODS = 4;
     private static final int CAUTIONS = 4;
 
     private final ReportContent content;
     private final ReportWords words;
     private final Flow flow;
-    private final Lettering text = Lettering.plain(9.5);
+    private final Lettering text = Lettering.plain(9.3);
 
     MethodPages(ReportContent content, ReportWords words, Flow flow) {
         this.content = content;
@@ -84,16 +86,17 @@ final class MethodPages {
 
     private void table(Limits limits) {
         Telling telling = new Telling(words.wording(), new FieldForm("none", 1, Texts.of("", ""), List.of()));
-        new Grid(flow, List.of(Grid.Column.text(words.text("report.column.rule"), 38),
+        new Grid(flow, List.of(Grid.Column.text(words.text("report.column.rule"), 36),
                 Grid.Column.number(words.text("report.column.near"), 16),
                 Grid.Column.number(words.text("report.column.overloaded"), 16),
-                Grid.Column.text(words.text("report.column.source"), 30)), 8.6)
+                Grid.Column.text(words.text("report.column.source"), 34)), 8.2)
                 .set(Stream.of(Rule.values()).map(rule -> row(telling, rule, limits.of(rule))).toList());
     }
 
     private List<Grid.Cell> row(Telling telling, Rule rule, Limit limit) {
-        String source = limit.on() ? limit.assumption() ? words.text("report.assumption", limit.source())
-                : limit.source() : words.text("report.off");
+        String source = !limit.on() ? words.text("report.off")
+                : limit.source().equals(OF_SITE) ? words.text("report.of-site")
+                : limit.assumption() ? words.text("report.assumption", limit.source()) : limit.source();
         return List.of(Grid.Cell.of(words.text("rule." + rule.code())), Grid.Cell.of(limit(telling, rule, limit.near())),
                 Grid.Cell.of(limit(telling, rule, limit.overloaded())), Grid.Cell.of(source));
     }

@@ -4,6 +4,7 @@ import bedmark.office.Place;
 import bedmark.picture.Ink;
 import bedmark.report.paper.Flow;
 import bedmark.report.paper.Lettering;
+import bedmark.wording.Telling;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -11,8 +12,10 @@ import java.util.stream.Stream;
 
 /** The first page: what is the case in two sentences, how many zones stand where, and the worst of them. */
 final class OverviewPages {
-    private static final int WORST = 10;
-    private static final double TILE = 62;
+    private static final int WORST = 8;
+    private static final int ACTIONS = 3;
+    private static final Lettering STRONG = Lettering.plain(9.5).bold();
+    private static final double TILE = 50;
     private static final double SIGN = 15;
 
     private final ReportContent content;
@@ -30,20 +33,21 @@ final class OverviewPages {
         sentences();
         tiles();
         worst();
-        caution();
+        first();
+        notice();
     }
 
     private void head() {
         Lettering title = Lettering.plain(21).bold();
         String plants = content.plants().isEmpty() ? words.text("report.no-plant")
                 : String.join(", ", content.plants());
-        flow.paragraph("H1", words.text("report.title", plants), title);
+        flow.paragraph("H1", plants, title);
         flow.down(1);
         Optional<String> first = days().findFirst();
         Optional<String> last = days().reduce((one, other) -> other);
         String surveyed = first.isEmpty() ? words.text("report.nothing-surveyed")
                 : words.text("report.surveyed", first.get(), last.orElseThrow());
-        flow.paragraph("P", surveyed + " · " + words.text("report.made", words.day(content.madeAt())),
+        flow.paragraph("P", words.text("report.kind") + " · " + surveyed + " · " + words.text("report.made", words.day(content.madeAt())),
                 Lettering.plain(9.5).soft());
         flow.down(5);
         flow.leaf().rule(Ink.INK, 1.4, flow.left(), flow.y(), flow.width());
@@ -80,14 +84,16 @@ final class OverviewPages {
         flow.down(12);
     }
 
+    /** The energy, and in brackets what comes of it. */
     private String amounts(ConveyorEnergy energy) {
-        List<String> amounts = new ArrayList<>(List.of(words.energy(energy.wh())));
+        List<String> amounts = new ArrayList<>();
         energy.currency().ifPresent(currency ->
                 amounts.add(words.money(energy.cost().orElseThrow(), currency)));
         if (energy.co2().isPresent()) {
-            amounts.add(words.tonnesOfCo2(energy.co2().getAsDouble()));
+            amounts.add(words.text("report.co2", words.tonnes(energy.co2().getAsDouble())));
         }
-        return String.join(", ", amounts);
+        return words.text("report.a-year", words.energy(energy.wh()))
+                + (amounts.isEmpty() ? "" : " (" + String.join(", ", amounts) + ")");
     }
 
     /** One tile a place: its figure, how many, its word. */
@@ -131,13 +137,43 @@ final class OverviewPages {
         }
     }
 
-    private void caution() {
-        Lettering strong = Lettering.plain(9.5).bold();
+    /** What helps most at the worst zones, as far as the page has room for it. */
+    private void first() {
+        Lettering text = Lettering.plain(9.5);
+        Lettering head = Lettering.plain(12.5).bold();
+        List<String> actions = content.at(Place.OVERLOADED, Place.UNDECIDED).stream().flatMap(zone ->
+                zone.examined().flatMap(one -> new Telling(words.wording(), one.form()).tell(one.assessment())
+                        .action()).map(action -> words.text("report.do", zone.tag(), action)).stream())
+                .limit(ACTIONS).toList();
+        List<String> shown = new ArrayList<>();
+        double height = head.leading() + 10;
+        for (String action : actions) {
+            height += flow.broken(action, text, flow.width()).size() * text.leading() + 2;
+            if (height + caution() < flow.room()) {
+                shown.add(action);
+            }
+        }
+        if (shown.isEmpty()) {
+            return;
+        }
+        flow.down(8);
+        flow.paragraph("H2", words.text("report.do-first"), head);
+        flow.booklet().tags().within("L", () -> shown.forEach(action -> {
+            flow.booklet().tags().within("LI", () -> flow.paragraph("LBody", action, text));
+            flow.down(2);
+        }));
+    }
+
+    private double caution() {
+        return flow.broken(words.text("command.notice"), STRONG, flow.width() - 14).size() * STRONG.leading() + 14;
+    }
+
+    private void notice() {
         String notice = words.text("command.notice");
-        double height = flow.broken(notice, strong, flow.width() - 14).size() * strong.leading();
+        double height = caution() - 14;
         flow.need(height + 14);
         flow.down(Math.max(10, flow.room() - height - 4));
         flow.leaf().fill(Ink.INK, flow.left(), flow.y() - 1, 5, height + 3);
-        flow.paragraph("P", notice, strong, flow.left() + 14, flow.width() - 14);
+        flow.paragraph("P", notice, STRONG, flow.left() + 14, flow.width() - 14);
     }
 }

@@ -15,8 +15,8 @@ final class RankGrid {
     static void set(Flow flow, ReportWords words, List<ReportZone> zones) {
         boolean severalPlants = zones.stream().map(zone -> zone.ranked().names().plant()).distinct().count() > 1;
         new Grid(flow, List.of(Grid.Column.text(words.text("report.column.zone"), 25),
-                Grid.Column.text(words.text("report.column.verdict"), 21),
-                Grid.Column.text(words.text("report.column.why"), 35),
+                Grid.Column.text(words.text("report.column.verdict"), 22),
+                Grid.Column.text(words.text("report.column.why"), 36),
                 Grid.Column.number(words.text("report.column.share"), 11),
                 Grid.Column.number(words.text("report.column.saving"), 14)), 8.8)
                 .set(zones.stream().map(zone -> row(words, zone, severalPlants)).toList());
@@ -25,11 +25,12 @@ final class RankGrid {
     private static List<Grid.Cell> row(ReportWords words, ReportZone zone, boolean severalPlants) {
         Place place = zone.ranked().place();
         OptionalDouble share = zone.ranked().driveShare();
+        boolean seen = place != Place.NOT_INSPECTED;
         String at = severalPlants ? zone.ranked().names().plant() : "";
         return List.of(Grid.Cell.of(zone.tag()).bold().then(at.isEmpty() ? zone.way() : zone.way() + " · " + at),
                 Grid.Cell.of(words.place(place)).in(place == Place.OVERLOADED ? Ink.OVER : Ink.INK)
                         .with(new LevelSign(place, 10)),
-                Grid.Cell.of(words.why(zone)), Grid.Cell.of(words.share(share)),
-                Grid.Cell.of(zone.ranked().saving().map(saving -> words.energy(saving.wh())).orElse("–")));
+                Grid.Cell.of(words.why(zone)), Grid.Cell.of(seen ? words.share(share) : "–"),
+                Grid.Cell.of(zone.ranked().saving().filter(saving -> seen).map(saving -> words.energy(saving.wh())).orElse("–")));
     }
 }

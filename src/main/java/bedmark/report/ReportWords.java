@@ -4,6 +4,7 @@ import bedmark.engine.Assessment;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Level;
 import bedmark.office.Place;
+import bedmark.survey.InspectionStatus;
 import bedmark.survey.Survey;
 import bedmark.wording.Telling;
 import bedmark.wording.Wording;
@@ -52,8 +53,9 @@ final class ReportWords {
         return text("report.money", wording.format().computed(sum, 0), currency);
     }
 
-    String tonnesOfCo2(double kg) {
-        return text("report.co2", wording.format().computed(kg / TONNE, 1));
+    /** CO₂ in tonnes. */
+    String tonnes(double kg) {
+        return text("report.tonnes", wording.format().computed(kg / TONNE, 1));
     }
 
     String share(OptionalDouble share) {
@@ -67,7 +69,7 @@ final class ReportWords {
 
     /** In a clause, why a zone stands where it stands. */
     String why(ReportZone zone) {
-        if (zone.examined().isEmpty()) {
+        if (zone.examined().isEmpty() || zone.ranked().place() == Place.NOT_INSPECTED) {
             return zone.visit().map(this::status).orElseGet(() -> text("report.never"));
         }
         Assessment assessment = zone.examined().get().assessment();
@@ -87,6 +89,10 @@ final class ReportWords {
 
     /** What came of a visit that brought no result. */
     String status(Survey visit) {
+        if (visit.inspectionStatus() == InspectionStatus.INSPECTED) {
+            return visit.startedAt().map(at -> text("report.under-way", day(at)))
+                    .orElseGet(() -> text("report.under-way-somewhen"));
+        }
         String word = text("screen.status." + visit.inspectionStatus().code());
         return visit.document().text("statusReason").filter(reason -> !reason.isBlank())
                 .map(reason -> text("report.status", word, reason)).orElse(word);

@@ -14,10 +14,16 @@ import java.util.stream.Stream;
 final class SheetPages {
     private static final DateTimeFormatter MINUTE = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm xxx");
     private static final double LARGEST = 8.8;
-    private static final double SMALLEST = 6.4;
+    private static final double SMALLEST = 6;
     private static final double STEP = 0.2;
-    private static final double NAMES = 0.27;
+    private static final double SIDE = 40;
+    private static final double TOP = 36;
+    private static final double NAMES = 0.25;
+    /** Between a name and the text beside it. */
+    private static final double WHITE = 8;
     private static final double HEAD_ROOM = 4;
+    /** From one baseline to the next, as a share of the size: closer than in running text. */
+    private static final double CLOSE = 1.21;
 
     private final ReportWords words;
     private final Flow flow;
@@ -36,21 +42,31 @@ final class SheetPages {
 
     /** @param first whether it is the first of them */
     void set(ReportZone zone, Examined examined, boolean first) {
-        flow.nextLeaf();
+        flow.nextLeaf(SIDE, TOP);
         if (first) {
             flow.booklet().entry(words.text("report.workings"), flow.leaf(), false);
         }
         flow.booklet().entry(zone.tag(), flow.leaf(), true);
         head(zone, examined);
         List<SheetPart> parts = examined.sheet(words.wording());
-        double size = LARGEST;
-        List<Block> blocks = blocks(parts, Lettering.plain(size));
-        while (size > SMALLEST && height(blocks, Lettering.plain(size)) > flow.room()) {
-            size -= STEP;
-            blocks = blocks(parts, Lettering.plain(size));
+        Lettering lettering = largest(parts);
+        blocks(parts, lettering).forEach(block -> set(block, lettering));
+    }
+
+    /** The largest letters that let the parts fit into the room, the smallest ones where none do. */
+    private Lettering largest(List<SheetPart> parts) {
+        int fitting = 0;
+        int tooLarge = (int) Math.round((LARGEST - SMALLEST) / STEP) + 1;
+        while (tooLarge - fitting > 1) {
+            int tried = (fitting + tooLarge) / 2;
+            Lettering lettering = Lettering.plain(SMALLEST + tried * STEP);
+            if (height(blocks(parts, lettering), lettering) > flow.room()) {
+                tooLarge = tried;
+            } else {
+                fitting = tried;
+            }
         }
-        Lettering lettering = Lettering.plain(size);
-        blocks.forEach(block -> set(block, lettering));
+        return Lettering.plain(SMALLEST + fitting * STEP);
     }
 
     private void head(ReportZone zone, Examined examined) {
@@ -86,9 +102,8 @@ final class SheetPages {
         }
         SheetPart.Row row = (SheetPart.Row) part;
         String name = row.lead().isEmpty() ? row.name() : row.lead() + ": " + row.name();
-        double names = flow.width() * NAMES;
-        return new Block(flow.broken(name, lettering, names - 8),
-                flow.broken(row.text(), lettering, flow.width() - names), false, 0);
+        double names = Math.max(flow.width() * NAMES, flow.measured(name, lettering) + WHITE);
+        return new Block(List.of(name), flow.broken(row.text(), lettering, flow.width() - names), false, names);
     }
 
     private Block whole(String text, Lettering lettering, boolean heading, double indent) {
@@ -96,30 +111,33 @@ final class SheetPages {
     }
 
     private static double height(List<Block> blocks, Lettering lettering) {
-        return blocks.stream().mapToDouble(block -> block.lines() * lettering.leading()
+        return blocks.stream().mapToDouble(block -> block.lines() * close(lettering)
                 + (block.heading() ? 2 * HEAD_ROOM : 0)).sum();
     }
 
     private void set(Block block, Lettering lettering) {
         if (block.heading()) {
             flow.down(HEAD_ROOM);
-            flow.need(3 * lettering.leading());
+            flow.need(3 * close(lettering));
             flow.leaf().rule(Ink.LINE, 0.6, flow.left(), flow.y() - 0.5, flow.width());
         }
-        flow.need(block.lines() * lettering.leading());
+        flow.need(block.lines() * close(lettering));
         double top = flow.y();
         Lettering style = block.heading() ? lettering.bold() : lettering;
         flow.booklet().tags().within(block.heading() ? "H3" : "P", () -> {
             lines(block.names(), lettering.soft(), flow.left(), top);
-            lines(block.texts(), style, flow.left() + block.indent()
-                    + (block.names().isEmpty() ? 0 : flow.width() * NAMES), top);
+            lines(block.texts(), style, flow.left() + block.indent(), top);
         });
-        flow.down(block.lines() * lettering.leading() + (block.heading() ? HEAD_ROOM / 2 : 0));
+        flow.down(block.lines() * close(lettering) + (block.heading() ? HEAD_ROOM / 2 : 0));
+    }
+
+    private static double close(Lettering lettering) {
+        return CLOSE * lettering.size();
     }
 
     private void lines(List<String> lines, Lettering lettering, double x, double top) {
         for (int i = 0; i < lines.size(); i++) {
-            flow.leaf().write(lines.get(i), lettering, x, top + i * lettering.leading() + lettering.rise());
+            flow.leaf().write(lines.get(i), lettering, x, top + i * close(lettering) + lettering.rise());
         }
     }
 }

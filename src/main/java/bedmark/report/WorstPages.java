@@ -23,15 +23,19 @@ final class WorstPages {
     private static final double POINTS_PER_MM = 72 / 25.4;
     /** Letters of the picture stand at the size of the page's, not at that of a tablet at arm's length. */
     private static final double PICTURE_SCALE = 0.95;
-    private static final double PICTURE = 178;
+    private static final double HEADING = 30;
+    /** What a card takes beside its picture. */
+    private static final double TEXTS = 178;
     private static final double BESIDE = 12;
-    private static final double CARD = 362;
 
     private final ReportContent content;
     private final ReportWords words;
     private final ReportOptions options;
     private final Flow flow;
     private final PhotoPrint print;
+    /** Height of a card, and of the picture in it. */
+    private final double card;
+    private final double high;
 
     WorstPages(ReportContent content, ReportWords words, ReportOptions options, Flow flow) {
         this.content = content;
@@ -39,6 +43,8 @@ final class WorstPages {
         this.options = options;
         this.flow = flow;
         print = new PhotoPrint(flow.booklet());
+        card = (flow.page() - HEADING) / 2;
+        high = card - TEXTS;
     }
 
     /** The zones that are shown. */
@@ -57,7 +63,7 @@ final class WorstPages {
         flow.paragraph("H2", words.text("report.worst-zones"), Lettering.plain(15).bold());
         flow.down(6);
         for (int i = 0; i < shown.size(); i++) {
-            flow.need(CARD);
+            flow.need(card);
             ReportZone zone = shown.get(i);
             flow.booklet().entry(zone.tag(), flow.leaf(), true);
             card(i + 1, zone, zone.examined().orElseThrow());
@@ -65,8 +71,7 @@ final class WorstPages {
     }
 
     private void card(int number, ReportZone zone, Examined examined) {
-        double top = flow.y();
-        flow.leaf().rule(Ink.INK, 1, flow.left(), top, flow.width());
+        flow.leaf().rule(Ink.INK, 1, flow.left(), flow.y(), flow.width());
         flow.down(6);
         head(number, zone, examined);
         Telling telling = new Telling(words.wording(), examined.form());
@@ -77,7 +82,7 @@ final class WorstPages {
         flow.down(8);
         figures(told);
         told.action().ifPresent(action -> flow.paragraph("P", action, Lettering.plain(9.5).bold()));
-        String rest = String.join(" ", List.of(told.atDesign(), told.repeat()).stream().flatMap(Optional::stream)
+        String rest = String.join(" ", List.of(told.sure().map(sure -> sure + "."), told.atDesign(), told.repeat()).stream().flatMap(Optional::stream)
                 .toList());
         if (!rest.isEmpty()) {
             flow.paragraph("P", rest, Lettering.plain(9).soft());
@@ -107,8 +112,7 @@ final class WorstPages {
         LevelSign sign = new LevelSign(zone.ranked().place(), 18);
         sign.draw(flow.leaf(), flow.left(), flow.y());
         double left = flow.left() + sign.width() + 4;
-        String sure = told.sure().map(text -> " (" + text + ")").orElse("");
-        flow.paragraph("P", told.sentence() + sure, Lettering.plain(11.5).bold().in(over ? Ink.OVER : Ink.INK), left,
+        flow.paragraph("P", told.sentence(), Lettering.plain(11.5).bold().in(over ? Ink.OVER : Ink.INK), left,
                 flow.width() - sign.width() - 4);
     }
 
@@ -118,14 +122,14 @@ final class WorstPages {
         double top = flow.y();
         ZoneSketch sketch = new ZoneSketcher(examined.assessor(), words.wording()).sketch(examined.survey().document(),
                 Optional.of(examined.assessment()), Optional.empty());
-        flow.leaf().fill(Ink.GROUND, flow.left(), top, width, PICTURE);
+        flow.leaf().fill(Ink.GROUND, flow.left(), top, width, high);
         double pad = 8;
-        Sheet sheet = new Sheet(width - 2 * pad, PICTURE - 2 * pad, POINTS_PER_MM * PICTURE_SCALE);
-        ZonePicture picture = ZonePicture.of(sketch, sheet, flow.booklet().faces());
-        flow.booklet().tags().figure(flow.leaf(), spoken(zone, examined, sketch), flow.left(), top, width, PICTURE,
+        Sheet sheet = new Sheet(width - 2 * pad, high - 2 * pad, POINTS_PER_MM * PICTURE_SCALE);
+        ZonePicture picture = ZonePicture.still(sketch, sheet, flow.booklet().faces());
+        flow.booklet().tags().figure(flow.leaf(), spoken(zone, examined, sketch), flow.left(), top, width, high,
                 () -> new DrawingPainter(flow.leaf(), flow.left() + pad, top + pad).paint(picture.drawing()));
         photo.ifPresent(one -> photo(one, flow.left() + width + BESIDE, top, flow.width() - width - BESIDE));
-        flow.down(PICTURE);
+        flow.down(high);
     }
 
     /** The picture for who does not see it. */
@@ -160,15 +164,15 @@ final class WorstPages {
     private void photo(Photo photo, double x, double top, double width) {
         Lettering small = Lettering.plain(8).soft();
         List<String> caption = photo.caption().isEmpty() ? List.of() : flow.broken(photo.caption(), small, width);
-        double room = PICTURE - caption.size() * small.leading() - 3;
+        double room = high - caption.size() * small.leading() - 3;
         double aspect = photo.photograph().aspect();
         double wide = Math.min(width, room * aspect);
-        double high = wide / aspect;
-        flow.booklet().tags().figure(flow.leaf(), words.text("report.photo", photo.caption()), x, top, wide, high,
-                () -> flow.leaf().image(photo.photograph(), x, top, wide, high));
+        double tall = wide / aspect;
+        flow.booklet().tags().figure(flow.leaf(), words.text("report.photo", photo.caption()), x, top, wide, tall,
+                () -> flow.leaf().image(photo.photograph(), x, top, wide, tall));
         flow.booklet().tags().within("Caption", () -> {
             for (int i = 0; i < caption.size(); i++) {
-                flow.leaf().write(caption.get(i), small, x, top + high + 3 + i * small.leading() + small.rise());
+                flow.leaf().write(caption.get(i), small, x, top + tall + 3 + i * small.leading() + small.rise());
             }
         });
     }

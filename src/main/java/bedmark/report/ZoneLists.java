@@ -27,7 +27,7 @@ final class ZoneLists {
     }
 
     private void head(String key) {
-        flow.down(10);
+        flow.down(12);
         if (flow.room() < flow.page() / 3) {
             flow.nextLeaf();
         }
@@ -38,7 +38,6 @@ final class ZoneLists {
 
     private void unseen() {
         List<ReportZone> unseen = content.at(Place.NOT_INSPECTED, Place.STALE);
-        flow.nextLeaf();
         head("report.not-inspected");
         if (unseen.isEmpty()) {
             flow.paragraph("P", words.text("report.all-inspected"), Lettering.plain(10));
@@ -50,7 +49,7 @@ final class ZoneLists {
                 Grid.Column.text(words.text("report.column.area"), 22),
                 Grid.Column.text(words.text("report.column.verdict"), 22),
                 Grid.Column.text(words.text("report.column.reason"), 32),
-                Grid.Column.text(words.text("report.column.last"), 14)), 8.8)
+                Grid.Column.text(words.text("report.column.last"), 17)), 8.8)
                 .set(unseen.stream().map(this::row).toList());
     }
 

@@ -15,4 +15,15 @@ public interface FolderChoice {
      * @return nothing where the person thought better of it
      */
     Optional<Path> choose(String title, Optional<Path> start);
+
+    /**
+     * Asks for a photo's file.
+     *
+     * @param title what the photo is for
+     * @param start the folder to begin in
+     * @return nothing where the person thought better of it, or the machine can't ask
+     */
+    default Optional<Path> choosePhoto(String title, Optional<Path> start) {
+        return Optional.empty();
+    }
 }

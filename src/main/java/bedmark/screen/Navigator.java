@@ -15,6 +15,12 @@ public interface Navigator {
     /** To a transfer point; its survey is begun where there is none. */
     void toZone(RoundModel round, RoundRow row);
 
+    /** To the actions and photos of a transfer point; its survey is begun where there is none. */
+    void toNotes(RoundModel round, RoundRow row);
+
+    /** To the end of the walk. */
+    void toFinish(RoundModel round);
+
     /**
      * To the store's own screen.
      *
@@ -24,4 +30,7 @@ public interface Navigator {
 
     /** To the queue and the export. */
     void toQueue(RoundModel round);
+
+    /** To the settings, and from there back to the screen that is shown now. */
+    void toSettings();
 }

@@ -18,7 +18,7 @@ final class SavedMark {
         Scribe scribe = workplace.scribe();
         return Bindings.createStringBinding(() -> {
             Wording wording = workplace.wording();
-            if (scribe.troubleProperty().get().isPresent()) {
+            if (scribe.troubleProperty().get().filter(trouble -> !trouble.code().equals(Workplace.FAILED)).isPresent()) {
                 return wording.text("screen.not-saved");
             }
             if (scribe.waitingProperty().get() > 0) {

@@ -27,7 +27,7 @@ import javafx.beans.property.ReadOnlyObjectWrapper;
 public final class Scribe implements AutoCloseable {
 
     /** One act that waits. */
-    private record Job(String person, Act act, Consumer<Entry> saved, Runnable refused) {
+    private record Job(long number, String person, Act act, Consumer<Entry> saved, Runnable refused) {
     }
 
     private final Store store;
@@ -37,6 +37,9 @@ public final class Scribe implements AutoCloseable {
     private final ReadOnlyObjectWrapper<Optional<OffsetDateTime>> savedAt;
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyIntegerWrapper waiting = new ReadOnlyIntegerWrapper(0);
+    /** How many acts were given to save so far, and how many of them before the trouble that shows. */
+    private long given;
+    private long reportedAfter;
 
     /**
      * A scribe for one store.
@@ -66,14 +69,21 @@ public final class Scribe implements AutoCloseable {
      */
     public void save(String person, Act act, Consumer<Entry> saved, Runnable refused) {
         waiting.set(waiting.get() + 1);
+        long number = ++given;
         pen.execute(() -> {
-            line.addLast(new Job(person, act, saved, refused));
+            line.addLast(new Job(number, person, act, saved, refused));
             writeAll();
         });
     }
 
-    /** Shows trouble that came from elsewhere, until the next act is saved. */
+    /** Runs on the screen once all that was given to save before is saved, or could not be. */
+    public void afterwards(Runnable then) {
+        pen.execute(() -> screen.execute(then));
+    }
+
+    /** Shows trouble that came from elsewhere, until an act is saved that the person does after it. */
     void report(Defect defect) {
+        reportedAfter = given;
         trouble.set(Optional.of(defect));
     }
 
@@ -91,11 +101,16 @@ public final class Scribe implements AutoCloseable {
                 screen.execute(() -> {
                     waiting.set(waiting.get() - 1);
                     savedAt.set(Optional.of(entry.at()));
-                    trouble.set(Optional.empty());
+                    if (job.number() > reportedAfter) {
+                        trouble.set(Optional.empty());
+                    }
                     job.saved().accept(entry);
                 });
             } catch (NotSaved e) {
-                screen.execute(() -> trouble.set(Optional.of(e.defect())));
+                screen.execute(() -> {
+                    reportedAfter = 0;
+                    trouble.set(Optional.of(e.defect()));
+                });
                 return;
             } catch (Refused e) {
                 // The act itself is impossible as things stand; trying it again would stop all others for ever.

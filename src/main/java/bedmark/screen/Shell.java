@@ -1,10 +1,16 @@
 package bedmark.screen;
 
+import bedmark.screen.finish.FinishModel;
+import bedmark.screen.finish.FinishView;
+import bedmark.screen.notes.NotesModel;
+import bedmark.screen.notes.NotesView;
 import bedmark.screen.queue.QueueModel;
 import bedmark.screen.queue.QueueView;
 import bedmark.screen.round.RoundModel;
 import bedmark.screen.round.RoundRow;
 import bedmark.screen.round.RoundView;
+import bedmark.screen.settings.SettingsModel;
+import bedmark.screen.settings.SettingsView;
 import bedmark.screen.start.StartModel;
 import bedmark.screen.start.StartView;
 import bedmark.screen.store.StoreModel;
@@ -17,18 +23,31 @@ import bedmark.screen.zone.ZoneModel;
 import bedmark.screen.zone.ZoneSetting;
 import bedmark.screen.zone.ZoneView;
 import bedmark.survey.SurveyHistory;
+import java.time.LocalTime;
+import java.util.Optional;
 import java.util.function.Supplier;
+import javafx.animation.Animation;
+import javafx.animation.KeyFrame;
+import javafx.animation.Timeline;
 import javafx.application.Platform;
 import javafx.scene.Scene;
 import javafx.scene.layout.BorderPane;
+import javafx.util.Duration;
 
 /** The one window: holds the screen that is shown, dresses it, and leads from one to the next. */
 public final class Shell implements Navigator {
+    private static final Duration CLOCK_TICK = Duration.seconds(20);
+
     private final Workplace workplace;
     private final BorderPane root = new BorderPane();
     private final Scene scene;
+    private final Timeline clock = new Timeline(new KeyFrame(CLOCK_TICK, event -> followClock()));
     private Supplier<Screen> current;
     private Screen screen;
+    private Light light = Light.DAY;
+    private double scale = 1;
+    private Optional<RoundModel> walked = Optional.empty();
+    private boolean failing;
 
     /** A window of that size; the start of a walk is shown first. */
     public Shell(Workplace workplace, double width, double height) {
@@ -38,6 +57,14 @@ public final class Shell implements Navigator {
         workplace.preferencesProperty().addListener((property, before, now) -> preferencesChanged(before, now));
         scene.widthProperty().addListener((property, before, now) -> turn());
         scene.heightProperty().addListener((property, before, now) -> turn());
+        scene.windowProperty().addListener((property, before, now) -> {
+            if (now != null) {
+                now.outputScaleXProperty().addListener((scaling, old, fresh) -> scaled(fresh.doubleValue()));
+                scaled(now.getOutputScaleX());
+            }
+        });
+        clock.setCycleCount(Animation.INDEFINITE);
+        clock.play();
         toStart();
     }
 
@@ -52,8 +79,10 @@ public final class Shell implements Navigator {
 
     /** What the person prefers may change on any screen: the same model is then shown anew. */
     private void preferencesChanged(Preferences before, Preferences now) {
-        boolean words = !before.locale().equals(now.locale()) || before.units() != now.units();
-        boolean looks = before.night() != now.night() || before.gloves() != now.gloves() || before.dpi() != now.dpi();
+        boolean words = !before.locale().equals(now.locale()) || before.units() != now.units()
+                || !before.chosenUnits().equals(now.chosenUnits());
+        boolean looks = before.lighting() != now.lighting() || before.gloves() != now.gloves()
+                || before.dpi() != now.dpi() || before.text() != now.text();
         if (looks) {
             dress();
         }
@@ -62,17 +91,45 @@ public final class Shell implements Navigator {
         }
     }
 
+    private Light wantedLight() {
+        return workplace.preferences().lighting().at(LocalTime.now(workplace.clock()));
+    }
+
+    /** Day and night change while a screen is worked on: it keeps its focus and what is typed, only colours change. */
+    void followClock() {
+        if (wantedLight() != light) {
+            dress();
+        }
+    }
+
+    /** The window came onto a screen whose dots are gathered into larger logical ones. */
+    private void scaled(double outputScale) {
+        if (outputScale > 0 && outputScale != scale) {
+            scale = outputScale;
+            dress();
+            show(current);
+        }
+    }
+
     private void dress() {
-        Preferences preferences = workplace.preferences();
-        Theme.apply(scene, preferences.night() ? Light.NIGHT : Light.DAY, density(preferences));
+        light = wantedLight();
+        Theme.apply(scene, light, density(workplace.preferences(), scale));
     }
 
     static Density density(Preferences preferences) {
-        return new Density(preferences.dpi(), preferences.gloves() ? Hand.GLOVED : Hand.BARE);
+        return density(preferences, 1);
+    }
+
+    /** @param scale dots of the glass to a logical pixel */
+    static Density density(Preferences preferences, double scale) {
+        return Density.of(preferences.dpi(), scale, preferences.gloves() ? Hand.GLOVED : Hand.BARE)
+                .withText(preferences.text());
     }
 
     private void turn() {
-        screen.turned(portrait());
+        if (screen != null) {
+            screen.turned(portrait());
+        }
     }
 
     private boolean portrait() {
@@ -100,6 +157,7 @@ public final class Shell implements Navigator {
                 scene.removePostLayoutPulseListener(this);
                 if (screen == shown) {
                     shown.shown();
+                    failing = false;
                 }
             }
         };
@@ -116,28 +174,54 @@ public final class Shell implements Navigator {
         }
     }
 
-    /** Something failed on the screen: what was typed is saved, and the person is told where they stand. */
+    /**
+     * Something failed on the screen: what was typed is saved, and the person is told and led back to the round, or to
+     * the start where the way to the round fails too.
+     */
     public void failed(Throwable failure) {
-        screen.left();
+        boolean again = failing;
+        failing = true;
+        letGo();
         workplace.report(failure);
-        toStart();
+        try {
+            walked.filter(round -> !again).ifPresentOrElse(this::toRound, this::toStart);
+        } catch (RuntimeException e) {
+            letGo();
+            toStart();
+        }
+    }
+
+    /** A screen that failed may fail once more when it is to let go; the next one is shown all the same. */
+    private void letGo() {
+        Optional<Screen> leaving = Optional.ofNullable(screen);
+        screen = null;
+        try {
+            leaving.ifPresent(Screen::left);
+        } catch (RuntimeException e) {
+            workplace.report(e);
+        }
     }
 
     /** Saves what is typed and lets go of the screen. */
     public void close() {
+        clock.stop();
         screen.left();
     }
 
     @Override
     public void toStart() {
+        walked = Optional.empty();
         StartModel model = new StartModel(workplace);
         show(() -> new StartView(workplace, model, this));
     }
 
     @Override
     public void toRound(RoundModel round) {
+        walked = Optional.of(round);
         round.reload();
         show(() -> new RoundView(workplace, round, this));
+        // What was completed a moment ago may still be on its way to the store.
+        workplace.scribe().afterwards(round::reload);
     }
 
     @Override
@@ -150,7 +234,29 @@ public final class Shell implements Navigator {
                     site.register(), site.assessor(), round.companions(row.transfer()),
                     round.last(row.transfer(), id), workplace.scribe(), workplace.preferences().person(),
                     workplace.clock()), workplace.preferences().units(), workplace.preferences().locale());
-            show(() -> new ZoneView(workplace, model, round, this, density(workplace.preferences())));
+            show(() -> new ZoneView(workplace, model, round, this, density(workplace.preferences(), scale)));
+        });
+    }
+
+    @Override
+    public void toNotes(RoundModel round, RoundRow row) {
+        round.survey(row, id -> {
+            // Leaving the screen saves what is typed there; the notes start from what the journal then says.
+            screen.left();
+            workplace.scribe().afterwards(() -> {
+                NotesModel model = new NotesModel(workplace, workplace.store().history(id).orElseThrow(),
+                        round.last(row.transfer(), id));
+                show(() -> new NotesView(workplace, model, round, row, this));
+            });
+        });
+    }
+
+    @Override
+    public void toFinish(RoundModel round) {
+        workplace.scribe().afterwards(() -> {
+            round.reload();
+            FinishModel model = new FinishModel(workplace, round);
+            show(() -> new FinishView(workplace, model, this));
         });
     }
 
@@ -164,5 +270,13 @@ public final class Shell implements Navigator {
     public void toQueue(RoundModel round) {
         QueueModel model = new QueueModel(workplace);
         show(() -> new QueueView(workplace, model, round, this));
+        workplace.scribe().afterwards(model::reload);
+    }
+
+    @Override
+    public void toSettings() {
+        Supplier<Screen> before = current;
+        SettingsModel model = new SettingsModel(workplace);
+        show(() -> new SettingsView(workplace, model, () -> show(before)));
     }
 }

@@ -19,6 +19,9 @@ import javafx.beans.property.SimpleObjectProperty;
 
 /** What all screens share: the store, who works here and how, and where work is done that takes time. */
 public final class Workplace implements AutoCloseable {
+    /** The code of a failure of the program itself, which leaves everything saved. */
+    static final String FAILED = "screen-failed";
+
     private final Store store;
     private final Clock clock;
     private final Executor screen;
@@ -43,6 +46,12 @@ public final class Workplace implements AutoCloseable {
      * @param samples      the folder with the demo plant, where there is one
      */
     public Workplace(Store store, Clock clock, Executor screen, FolderChoice folderChoice, Optional<Path> samples) {
+        this(store, readSite(store), clock, screen, folderChoice, samples);
+    }
+
+    /** As above, with the plant of the store, which somebody has read already. */
+    Workplace(Store store, Optional<Site> site, Clock clock, Executor screen, FolderChoice folderChoice,
+              Optional<Path> samples) {
         this.store = store;
         this.clock = clock;
         this.screen = screen;
@@ -51,7 +60,7 @@ public final class Workplace implements AutoCloseable {
         this.scribe = new Scribe(store, screen);
         this.preferencesFile = new PreferencesFile(store.folder());
         this.preferences = new SimpleObjectProperty<>(preferencesFile.read());
-        this.site = new ReadOnlyObjectWrapper<>(readSite());
+        this.site = new ReadOnlyObjectWrapper<>(site);
         preferences.addListener((property, before, now) -> {
             preferencesFile.write(now);
             wording.set(wording(now));
@@ -60,10 +69,11 @@ public final class Workplace implements AutoCloseable {
     }
 
     private static Wording wording(Preferences preferences) {
-        return new Wording(new Words(preferences.locale()), preferences.units());
+        return new Wording(new Words(preferences.locale()), preferences.units(), preferences.chosenUnits());
     }
 
-    private Optional<Site> readSite() {
+    /** The plant of a store. */
+    static Optional<Site> readSite(Store store) {
         return store.register().map(Site::of);
     }
 
@@ -75,7 +85,7 @@ public final class Workplace implements AutoCloseable {
 
     /** Reads the plant anew, where it may have changed. Runs beside the screen. */
     public void reread() {
-        Optional<Site> read = readSite();
+        Optional<Site> read = readSite(store);
         screen.execute(() -> site.set(read));
     }
 
@@ -134,7 +144,7 @@ public final class Workplace implements AutoCloseable {
 
     /** Shows a failure of the program itself in the head of the screen, in words. */
     void report(Throwable failure) {
-        scribe.report(Defect.in("", "screen-failed", failure.getClass().getSimpleName()));
+        scribe.report(Defect.in("", FAILED, failure.getClass().getSimpleName()));
     }
 
     /** Runs work that takes time beside the screen, one after the other. */

@@ -160,7 +160,8 @@ public final class CalculationSheet {
     private String mark(Survey survey, Pointer place) {
         Optional<Node> node = survey.document().at(place);
         return node.filter(Branch.class::isInstance).flatMap(found -> ((Branch) found).text("quality"))
-                .filter(quality -> !quality.equals(Quality.MEASURED.code())).map(quality -> " " + wording.text("screen.quality." + quality)).orElse("");
+                .filter(quality -> !quality.equals(Quality.MEASURED.code()))
+                .map(quality -> " " + wording.text("screen.quality." + quality)).orElse("");
     }
 
     private String given(Working.Input input) {

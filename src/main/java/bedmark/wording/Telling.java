@@ -13,7 +13,6 @@ import bedmark.form.FieldForm;
 import bedmark.quantity.Dimension;
 import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.Unit;
-import bedmark.quantity.UnitSystem;
 import bedmark.survey.Readings;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
@@ -32,6 +31,8 @@ public final class Telling {
     private static final Set<Rule> ABOUT_POWER = Set.of(Rule.DRIVE_NEAR_RATING, Rule.SKIRTS_OVER_BUDGET);
     private static final Set<Rule> ABOUT_DEPTH =
             Set.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD, Rule.BED_BEHIND_BELT);
+    /** Their clauses speak of the bed, so that a second one can go on about it. */
+    private static final Set<Rule> ABOUT_BED = Set.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD);
     private static final Set<String> LOWER_THE_BED = Set.of("free-bed", "lower-feed", "widen-boards");
     /** The depth speaks first where several rules say the same level. */
     private static final List<Rule> FIRST = List.of(Rule.BED_OVER_DESIGN, Rule.BED_OVER_BOARD,
@@ -51,8 +52,16 @@ public final class Telling {
         Optional<String> atDesign = assessment.level() == Level.INCOMPLETE ? Optional.empty()
                 : Optional.of(atDesign(assessment));
         return new Told(sentence(assessment, leading), leading.flatMap(finding -> sure(assessment, finding)),
-                atDesign, figures(assessment), action(assessment, leading),
+                leading.filter(finding -> assessment.level() != Level.INCOMPLETE).flatMap(this::against), atDesign, figures(assessment), action(assessment, leading),
                 assessment.repeat().map(this::repeat));
+    }
+
+    /** What the leading rule observed against the limit of its level; nothing where it has no limit. */
+    private Optional<String> against(Finding finding) {
+        boolean warns = finding.level() == Level.NEAR;
+        OptionalDouble limit = warns || finding.overloaded().isEmpty() ? finding.near() : finding.overloaded();
+        return limit.isEmpty() ? Optional.empty() : Optional.of(wording.text("verdict.against",
+                observed(finding, finding.observed()), limit(finding, limit.getAsDouble())));
     }
 
     /** The reading to take again, and within how much (k = 2) it would settle the verdict. */
@@ -62,8 +71,8 @@ public final class Telling {
         if (repeat.standardUncertainty().isEmpty() || dimension.isEmpty()) {
             return wording.text("verdict.repeat", reading);
         }
-        Unit unit = dimension.get() == Dimension.LENGTH ? wording.units().smallLength()
-                : wording.units().unit(dimension.get());
+        Unit unit = dimension.get() == Dimension.LENGTH ? wording.smallLength()
+                : wording.unit(dimension.get());
         return wording.text("verdict.repeat-within", reading,
                 wording.computed(2 * repeat.standardUncertainty().getAsDouble(), unit));
     }
@@ -79,9 +88,10 @@ public final class Telling {
     private String sentence(Assessment assessment, Optional<Finding> leading) {
         Level level = assessment.level();
         if (level == Level.INCOMPLETE) {
-            List<String> waiting = assessment.missingRequired();
+            List<String> waiting = assessment.missingRequired().stream().map(name -> wording.asked(name, form))
+                    .distinct().toList();
             return waiting.isEmpty() ? wording.text("verdict.incomplete")
-                    : wording.text("verdict.incomplete-for", wording.reading(waiting.get(0), form),
+                    : wording.text("verdict.incomplete-for", waiting.get(0),
                             wording.format().computed(waiting.size() - 1.0, 0), waiting.size() - 1);
         }
         if (leading.isEmpty()) {
@@ -90,8 +100,10 @@ public final class Telling {
         Optional<Finding> lagging = assessment.findings().stream()
                 .filter(finding -> finding.rule() == Rule.BED_BEHIND_BELT && finding.level() != Level.WITHIN
                         && leading.get().rule() != Rule.BED_BEHIND_BELT).findFirst();
-        return lagging.map(second -> wording.text("verdict.sentence-two", level(level), clause(leading.get()),
-                        clause(second)))
+        return lagging.map(second -> wording.text(ABOUT_BED.contains(leading.get().rule())
+                                ? "verdict.sentence-bed" : "verdict.sentence-two", level(level), clause(leading.get()),
+                        ABOUT_BED.contains(leading.get().rule()) ? wording.text("rule.bed-behind-belt.too",
+                                observed(second, second.observed())) : clause(second)))
                 .orElseGet(() -> wording.text("verdict.sentence", level(level), clause(leading.get())));
     }
 
@@ -115,7 +127,7 @@ public final class Telling {
             return wording.format().computed(number, 0);
         }
         if (rule == Rule.BELT_TOO_FAST) {
-            return wording.computed(number, wording.units().unit(Dimension.SPEED));
+            return wording.computed(number, wording.unit(Dimension.SPEED));
         }
         return TIMES.contains(rule) ? wording.format().computed(number, 1) : wording.percent(number);
     }
@@ -163,12 +175,11 @@ public final class Telling {
     }
 
     private List<Told.Figure> figures(Assessment assessment) {
-        UnitSystem units = wording.units();
         List<Told.Figure> figures = new ArrayList<>();
-        figure(assessment, Result.SKIRT_DRAG, "figure.drag", units.unit(Dimension.FORCE)).ifPresent(figures::add);
+        figure(assessment, Result.SKIRT_DRAG, "figure.drag", wording.unit(Dimension.FORCE)).ifPresent(figures::add);
         boolean atMotor = assessment.get(Result.DRIVE_POWER).isPresent();
         figure(assessment, atMotor ? Result.DRIVE_POWER : Result.SKIRT_POWER,
-                atMotor ? "figure.power-motor" : "figure.power-belt", units.unit(Dimension.POWER))
+                atMotor ? "figure.power-motor" : "figure.power-belt", wording.unit(Dimension.POWER))
                 .ifPresent(figures::add);
         figure(assessment, Result.DRIVE_SHARE, "figure.share", Unit.PERCENT).ifPresent(figures::add);
         assessment.leading().ifPresent(component -> figures.add(leads(assessment, component)));
@@ -219,12 +230,12 @@ public final class Telling {
 
     /** A remedy in one sentence: what is changed, the depth that comes of it, what it saves in a year. */
     public String remedy(Remedy remedy) {
-        Unit small = wording.units().smallLength();
+        Unit small = wording.smallLength();
         String change = remedy.change().isPresent() ? wording.percent(remedy.change().getAsDouble()) : "";
         Optional<Unit> unit = Unit.ofCode(remedy.unit());
         if (unit.isPresent() && remedy.change().isPresent()) {
             change = wording.computed(unit.get().toSi(BigDecimal.valueOf(remedy.change().getAsDouble())),
-                    wording.units().unit(unit.get().dimension()));
+                    wording.unit(unit.get().dimension()));
         }
         String saved = remedy.savedWh().isPresent()
                 ? wording.text("action.saves", wording.text("action.megawatt-hours",

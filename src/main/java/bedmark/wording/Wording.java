@@ -9,12 +9,17 @@ import bedmark.engine.Assumption;
 import bedmark.form.Field;
 import bedmark.form.FieldForm;
 import bedmark.form.Judgement;
+import bedmark.quantity.Dimension;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.TypedNumber;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import bedmark.words.Words;
+import java.time.LocalDate;
+import java.time.OffsetDateTime;
+import java.time.format.DateTimeFormatter;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -22,8 +27,32 @@ import java.util.Optional;
  *
  * @param words the language, and with it the number format
  * @param units the unit system of results
+ * @param liked for a unit of that system the one of the same dimension that the person likes better
  */
-public record Wording(Words words, UnitSystem units) {
+public record Wording(Words words, UnitSystem units, Map<Unit, Unit> liked) {
+    public Wording {
+        liked = Map.copyOf(liked);
+    }
+
+    /** The units of a system as they are. */
+    public Wording(Words words, UnitSystem units) {
+        this(words, units, Map.of());
+    }
+
+    /** The unit that the person likes better than a usual one; that one itself where there is none. */
+    public Unit liked(Unit usual) {
+        return liked.getOrDefault(usual, usual);
+    }
+
+    /** The unit in which results of a dimension are shown. */
+    public Unit unit(Dimension dimension) {
+        return liked(units.unit(dimension));
+    }
+
+    /** The unit in which depths, gaps and widths are shown. */
+    public Unit smallLength() {
+        return liked(units.smallLength());
+    }
 
     /** The text of a key (see {@link Words#text}). */
     public String text(String key, Object... arguments) {
@@ -37,6 +66,16 @@ public record Wording(Words words, UnitSystem units) {
     /** The symbol of a unit. */
     public String symbol(Unit unit) {
         return text("unit." + unit.key());
+    }
+
+    /** A day of the calendar, with its month in letters: figures alone are read one way here and another there. */
+    public String day(LocalDate day) {
+        return DateTimeFormatter.ofPattern("d MMM uuuu", words.locale()).format(day);
+    }
+
+    /** A day and the time of day there. */
+    public String moment(OffsetDateTime at) {
+        return day(at.toLocalDate()) + ", " + DateTimeFormatter.ofPattern("HH:mm").format(at);
     }
 
     /** A computed number in a unit, with its symbol. */
@@ -135,6 +174,16 @@ public record Wording(Words words, UnitSystem units) {
             String key = "assumption.word." + argument;
             return words.has(key) ? text(key) : argument;
         }
+    }
+
+    /**
+     * What people call what is asked for: the whole table where a reading stands in one.
+     *
+     * @param name a JSON Pointer as the engine names its readings
+     */
+    public String asked(String name, FieldForm form) {
+        return form.fieldAt(Pointer.parse(name)).map(field -> inSentence(field.head().label().in(words.language())))
+                .orElseGet(() -> reading(name, form));
     }
 
     /**

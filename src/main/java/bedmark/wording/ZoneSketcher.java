@@ -8,7 +8,6 @@ import bedmark.engine.Datum;
 import bedmark.engine.LoadingZone;
 import bedmark.engine.Result;
 import bedmark.engine.bed.DepthPoint;
-import bedmark.engine.seal.SealSegment;
 import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Reading;
 import bedmark.engine.verdict.AllowedDepth;
@@ -102,7 +101,7 @@ public final class ZoneSketcher {
         return stations;
     }
 
-    /** The line of the table that each station of {@link #stations} stands for. */
+    /** The line of the table that each station of the sketch stands for. */
     public static List<Integer> lines(Branch document) {
         List<Integer> lines = new ArrayList<>();
         List<Node> rows = document.at(Survey.READINGS.child("bedDepths"))
@@ -137,22 +136,22 @@ public final class ZoneSketcher {
     private Captions captions(LoadingZone zone, OptionalDouble length, OptionalDouble height, OptionalDouble spacing,
                               OptionalDouble speed, Optional<AllowedDepth> allowed,
                               List<ZoneSketch.Station> stations) {
-        Unit metres = wording.units().unit(Dimension.LENGTH);
+        Unit metres = wording.unit(Dimension.LENGTH);
         return new Captions(wording.text("screen.picture.feed"),
                 speed.isPresent() ? wording.text("screen.picture.belt",
-                        wording.computed(speed.getAsDouble(), wording.units().unit(Dimension.SPEED)))
+                        wording.computed(speed.getAsDouble(), wording.unit(Dimension.SPEED)))
                         : wording.text("screen.picture.belt-unknown"),
                 height.isPresent() ? small(height.getAsDouble()) : "",
                 wording.text(height.isPresent() ? "screen.picture.board-top" : "screen.picture.board-unknown"),
                 length.isPresent() ? wording.computed(length.getAsDouble(), metres)
                         : wording.text("screen.picture.length-unknown"),
                 allowed.map(limit -> small(limit.overloaded().orElseThrow())).orElse(""),
-                wording.text("screen.picture.allowed"),
+                allowed.map(limit -> wording.text("zone.limit." + limit.rule().code())).orElse(""),
                 times -> wording.text("screen.picture.heights", wording.format().exact(
                         new BigDecimal(times, new MathContext(2)).stripTrailingZeros())),
                 stations.isEmpty() ? Optional.of(wording.text("screen.picture.prompt")) : Optional.empty(),
                 spacing.isPresent() ? small(spacing.getAsDouble()) : wording.text("screen.picture.width-unknown"),
-                sectionTitle(stations), seals(zone.seals()));
+                sectionTitle(stations), new SectionNote(wording, this::small).of(zone, shownAt(stations)));
     }
 
     private String sectionTitle(List<ZoneSketch.Station> stations) {
@@ -161,20 +160,15 @@ public final class ZoneSketcher {
                 : "";
     }
 
-    /** The seals in a few words: the defects, else that they are sound. */
-    private String seals(List<SealSegment> seals) {
-        if (seals.isEmpty()) {
-            return wording.text("screen.picture.seals-unknown");
-        }
-        List<String> defects = seals.stream().filter(segment -> segment.condition().isDefect())
-                .map(segment -> wording.text("screen.seal." + segment.condition().code())).distinct().toList();
-        return defects.isEmpty() ? wording.text("screen.picture.seals-sound")
-                : wording.text("screen.picture.seals", String.join(", ", defects));
+    /** Where the zone is cut across. */
+    private static double shownAt(List<ZoneSketch.Station> stations) {
+        OptionalInt shown = ZoneSketch.shown(stations);
+        return shown.isPresent() ? stations.get(shown.getAsInt()).position() : 0;
     }
 
     /** A depth or width as a bare number of the small unit; the picture's captions share one unit. */
     private String small(double metres) {
-        Unit unit = wording.units().smallLength();
+        Unit unit = wording.smallLength();
         return unit == Unit.MILLIMETRE ? wording.format().computed(unit.fromSi(metres), 0)
                 : wording.format().computed(metres, unit);
     }

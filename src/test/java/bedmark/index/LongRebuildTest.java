@@ -44,7 +44,7 @@ class LongRebuildTest {
         Path store = folder.resolve("store");
         run("append", store);
         List<String> before = answers(run("ask", store));
-        assertTrue(before.size() > ENTRIES / 20, "every survey was asked for");
+        assertTrue(before.size() > Math.min(ENTRIES, 50_000) / 20, "surveys were asked for one by one");
         List<String> rebuilt = run("rebuild", store);
         assertTrue(rebuilt.contains("rebuilt " + ENTRIES), rebuilt::toString);
         String everyPercent = LongStream.rangeClosed(0, 100).boxed().toList().toString();
@@ -52,6 +52,6 @@ class LongRebuildTest {
         assertTrue(progress.endsWith(everyPercent.substring(everyPercent.length() - 40)), progress);
         List<String> after = answers(run("ask", store));
         assertEquals(before, after);
-        assertFalse(before.get(0).contains("rebuilt=true"), "the original is asked, not a new one");
+        assertFalse(before.stream().anyMatch(line -> line.contains("rebuilt=true")), "the original is asked, not a new one");
     }
 }

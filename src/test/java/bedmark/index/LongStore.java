@@ -64,8 +64,17 @@ public final class LongStore {
         System.out.println("progress " + heard);
     }
 
-    /** A line for each question: what was asked, and a digest of the answer. */
+    /**
+     * A line for each row of the index and for each question: a digest of the answer. Surveys are asked for one by one
+     * too, or every so-and-so-manieth of them where there are very many.
+     */
     private static void ask(Path folder) {
+        try (Database database = Database.openToRead(folder.resolve(Ledger.INDEX))) {
+            for (String table : Asked.TABLES) {
+                say("table " + table, database.rows("select * from " + table + " order by 1", row ->
+                        Digest.of(Asked.text(table, row).getBytes(StandardCharsets.UTF_8)).hashCode()));
+            }
+        }
         try (Store store = Store.open(folder, options())) {
             System.out.println("opening " + store.opening());
             List<SurveyLine> lines = store.surveys(SurveyQuery.ALL);
@@ -76,7 +85,8 @@ public final class LongStore {
             say("walks", store.walks());
             say("exports", store.exports());
             say("register", store.register());
-            for (SurveyLine line : lines) {
+            for (int i = 0; i < lines.size(); i += 1 + lines.size() / 3_000) {
+                SurveyLine line = lines.get(i);
                 say(line.id().toString(), store.survey(line.id()) + " " + store.history(line.id()) + " "
                         + store.latestFinished(line.transfer(), Optional.of(line.id())));
             }

@@ -67,6 +67,7 @@ public final class BagFuzz {
             if (Arrays.equals(data, at, at + BETWEEN.length, BETWEEN, 0, BETWEEN.length)) {
                 parts.add(Arrays.copyOfRange(data, from, at));
                 from = at + BETWEEN.length;
+                at = from - 1;
             }
         }
         parts.add(Arrays.copyOfRange(data, from, data.length));

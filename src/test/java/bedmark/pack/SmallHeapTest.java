@@ -111,6 +111,23 @@ class SmallHeapTest {
                 "zip-ratio-too-high"), judged(256, packs.toArray(Path[]::new)));
     }
 
+    /** The whole list of hostile packs, but for what a reader of bundles or an office judges. */
+    @Test
+    void noHostilePackAsksForMoreThan256Megabytes() throws IOException, InterruptedException {
+        HostilePacks hostile = new HostilePacks(DeviceKey.of(folder.resolve("store")),
+                DeviceKey.of(folder.resolve("stranger")));
+        List<Path> packs = new ArrayList<>();
+        List<String> codes = new ArrayList<>();
+        for (HostilePacks.Hostile one : hostile.all().values()) {
+            if (!List.of("device-untrusted", "unit-wrong").contains(one.code())) {
+                packs.add(Files.write(folder.resolve("hostile" + packs.size() + ".zip"), one.bytes()));
+                codes.add(one.code());
+            }
+        }
+        assertTrue(codes.size() > 40, codes::toString);
+        assertEquals(codes, judged(256, packs.toArray(Path[]::new)));
+    }
+
     /** A bundle that holds something else far down. */
     private Path packed(DeviceKey key, String name, Node full) throws IOException {
         Node deep = full;

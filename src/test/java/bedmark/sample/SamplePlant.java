@@ -3,6 +3,7 @@ package bedmark.sample;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.quantity.Quantity;
+import bedmark.quantity.Unit;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
@@ -31,13 +32,13 @@ final class SamplePlant {
                 .with("areas", rows("areas", (row, branch) -> branch))
                 .with("materials", rows("materials", (row, branch) -> branch))
                 .with("conveyors", rows("conveyors", (row, branch) -> tagged(branch, "CV")))
-                .with("transfers", rows("transfers", (row, branch) -> tagged(branch, "LZ")))
+                .with("transfers", rows("transfers", (row, branch) -> noted(tagged(branch, "LZ"))))
                 .with("limits", Branch.EMPTY.with("skirts-over-budget", Branch.EMPTY.with("near", decimal("0.12"))))
                 .with("sealRates", Node.Series.of(Branch.EMPTY.with("type", "oblique")
                         .with("condition", "over-tightened").with("multiplier", decimal("1.6"))))
                 .with("instruments", Node.Series.of(Branch.EMPTY.with("kind", "belt-scale")
                         .with("relative", decimal("0.015"))))
-                .with("tariff", Branch.EMPTY.with("currency", "EUR").with("pricePerKWh", decimal("0.14")))
+                .with("tariff", Branch.EMPTY.with("currency", "EUR").with("energy", decimal("0.14")))
                 .with("co2Factor", decimal("0.32"));
     }
 
@@ -77,6 +78,30 @@ final class SamplePlant {
             begun = begun.with(member.getKey(), member.getValue());
         }
         return begun;
+    }
+
+    /** What the office wants to be known at two of the points, and what it knows to be open at a third. */
+    private static Branch noted(Branch transfer) {
+        return switch (transfer.text("id").orElseThrow()) {
+            case "TP-12" -> transfer.with("officeNotes", Node.Series.of(Branch.EMPTY
+                    .with("text", "The left inspection door sticks. Ask the control room for the key of the right one.")
+                    .with("by", "plant office").with("at", "2026-09-15")));
+            case "TP-19" -> transfer.with("officeNotes", Node.Series.of(Branch.EMPTY
+                    .with("text", "New boards since August: take the spacing anew, and photograph both ends.")
+                    .with("by", "plant office").with("at", "2026-09-18")))
+                    .with("openActions", Node.Series.of(Branch.EMPTY
+                            .with("what", "Renew the right seal over its whole length").with("who", "raw mix fitter")
+                            .with("by", "2026-09-18").with("workOrder", "WO-26-0877")
+                            .with("assetId", transfer.text("assetId").orElseThrow())
+                            .with("seal", Branch.EMPTY.with("type", "vertical").with("width", length("200", Unit.MILLIMETRE))
+                                    .with("thickness", length("15", Unit.MILLIMETRE))
+                                    .with("length", length("6.5", Unit.METRE)).with("pieces", Node.number(2)))));
+            default -> transfer;
+        };
+    }
+
+    private static Quantity length(String number, Unit unit) {
+        return Quantity.of(new BigDecimal(number), unit);
     }
 
     private static Node decimal(String number) {

@@ -6,6 +6,8 @@ import bedmark.screen.start.StartModel;
 import bedmark.screen.start.StartView;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.nio.file.attribute.FileTime;
 import java.time.Clock;
 import java.time.Instant;
 import java.time.ZoneOffset;
@@ -20,7 +22,9 @@ import org.junit.jupiter.api.io.TempDir;
 
 /** Takes the pictures of every screen that {@code src/site/screens} shows, in both orientations. */
 class ScreenPicturesTest {
-    private static final Path PICTURES = Path.of("src", "site", "screens");
+    private static final Path PAGE = Path.of("src", "site", "screens", "README.md");
+    private static final Path PICTURES = Path.of(System.getProperty("bedmark.pictures", PAGE.getParent().toString()));
+    private static final Path CAMERA = Path.of("target", "camera");
     private static final Path STICK = Path.of("target", "usb-stick");
     private static final Clock CLOCK = Clock.fixed(Instant.parse("2026-09-22T14:20:00Z"), ZoneOffset.ofHours(2));
     private static final Locale SPANISH = Locale.forLanguageTag("es");
@@ -48,11 +52,15 @@ class ScreenPicturesTest {
                 CLOCK, width, height)) {
             app = opened;
             prefer(language, night, false);
+            camera();
             start();
+            settings();
             round();
             freshZone(language);
             overloadedZone();
             otherZones();
+            notes();
+            finish();
             queue();
         }
     }
@@ -66,6 +74,74 @@ class ScreenPicturesTest {
         app.type("A. Vale");
         app.click("caution-read");
         takeAll("start");
+    }
+
+    /** Two photos of the demo plant, as a camera app would have left them. */
+    private void camera() throws Exception {
+        Files.createDirectories(CAMERA);
+        for (String photo : List.of("tp-21-caked-liner.jpg", "tp-10-torn-seal.png")) {
+            Files.copy(Path.of("sample-surveys", "photos", photo), CAMERA.resolve(photo),
+                    StandardCopyOption.REPLACE_EXISTING);
+            Files.setLastModifiedTime(CAMERA.resolve(photo), FileTime.from(CLOCK.instant()));
+        }
+        Glass.on(() -> {
+            app.workplace().preferencesProperty().set(app.workplace().preferences()
+                    .withWatchedFolder(Optional.of(CAMERA.toString())));
+            return null;
+        });
+    }
+
+    private void settings() throws Exception {
+        app.click("to-settings");
+        app.until(() -> app.has("settings-done"));
+        takeAll("settings");
+        app.click("settings-done");
+        app.until(() -> app.has("person"));
+    }
+
+    private void notes() throws Exception {
+        open("TP-19");
+        app.click("foot-notes");
+        app.until(() -> app.has("shot-1"));
+        pictured("shot-0", "shot-1");
+        take("notes-fresh");
+        app.click("foot-round");
+        open("TP-08");
+        app.click("foot-notes");
+        app.until(() -> app.has("shot-1"));
+        pictured("shot-0", "shot-1", "photo-0", "photo-1");
+        takeAll("notes");
+        app.click("action-1");
+        app.click("order-seal");
+        take("notes-action");
+        app.click("action-cancel");
+        app.click("photo-0");
+        app.until(() -> !app.shell().scene().getRoot().lookupAll(".photo-editor .image-view").isEmpty());
+        take("notes-photo");
+        app.click("photo-keep");
+        app.click("foot-round");
+        app.until(() -> app.has("search"));
+        app.click("propose");
+        app.click("propose-tag");
+        app.type("TP-19A");
+        take("round-propose");
+        app.click("propose-send");
+        app.until(() -> app.has("search"));
+    }
+
+    /** Waits until the tiles show their photos. */
+    private void pictured(String... tiles) throws Exception {
+        for (String tile : tiles) {
+            app.until(() -> Glass.on(() -> !app.node(tile).lookupAll(".image-view").isEmpty()));
+        }
+    }
+
+    private void finish() throws Exception {
+        app.click("to-finish");
+        app.until(() -> app.has("sign-off"));
+        takeAll("finish");
+        app.click("foot-back");
+        app.until(() -> app.has("search"));
     }
 
     /** Loading is over before a picture can be taken, so that the screen is shown with a model that stands still. */
@@ -224,7 +300,7 @@ class ScreenPicturesTest {
         String file = name + "-" + orientation + (now.night() ? "-night" : "-day") + "-"
                 + now.locale().getLanguage() + (now.gloves() ? "-gloved" : "") + ".png";
         app.picture(PICTURES.resolve(file));
-        assertTrue(Files.readString(PICTURES.resolve("README.md")).contains("(" + file + ")"),
+        assertTrue(Files.readString(PAGE).contains("(" + file + ")"),
                 () -> file + " is not on the page of the pictures");
     }
 }

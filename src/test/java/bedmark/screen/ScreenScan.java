@@ -14,6 +14,7 @@ import javafx.scene.control.ButtonBase;
 import javafx.scene.control.Control;
 import javafx.scene.control.Label;
 import javafx.scene.control.Labeled;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.layout.BackgroundFill;
@@ -25,24 +26,40 @@ import javafx.scene.text.Text;
 final class ScreenScan {
     private static final double SLACK = 1;
 
-    private final Scene scene;
+    private final double width;
+    private final double height;
+    private final double foot;
     private final Density bare;
     private final Density density;
     private final List<String> findings = new ArrayList<>();
 
-    private ScreenScan(Scene scene, Density density) {
-        this.scene = scene;
+    private ScreenScan(Parent root, Density density, double width, double height) {
+        this.width = width;
+        this.height = height;
+        this.foot = Optional.ofNullable(root.lookup(".foot-bar")).map(bar -> top(bar)).orElse(height);
         this.density = density;
         this.bare = new Density(density.dpi(), Hand.BARE);
     }
 
     /** What is wrong with a scene, in words; called on the screen's thread. */
     static List<String> of(Scene scene, Density density) {
-        scene.getRoot().applyCss();
-        scene.getRoot().layout();
-        ScreenScan scan = new ScreenScan(scene, density);
-        scan.look(scene.getRoot());
+        return of(scene.getRoot(), density, scene.getWidth(), scene.getHeight());
+    }
+
+    /** The same as if the glass had so many pixels, which is how it is on a denser one of the same size. */
+    static List<String> of(Parent root, Density density, double width, double height) {
+        root.resize(width, height);
+        for (int pass = 0; pass < 2; pass++) {
+            root.applyCss();
+            root.layout();
+        }
+        ScreenScan scan = new ScreenScan(root, density, width, height);
+        scan.look(root);
         return scan.findings;
+    }
+
+    private static double top(Node node) {
+        return node.localToScene(node.getLayoutBounds()).getMinY();
     }
 
     /** Whether the caution stands on the screen. */
@@ -62,6 +79,10 @@ final class ScreenScan {
         }
         target(node);
         focus(node);
+        inSight(node);
+        if (node instanceof TextInputControl input) {
+            contrast(input);
+        }
         if (node instanceof Labeled labeled) {
             whole(labeled);
             contrast(labeled);
@@ -109,9 +130,36 @@ final class ScreenScan {
                 || inner.getMinY() < outer.getMinY() - 3 * SLACK || inner.getMaxY() > outer.getMaxY() + 3 * SLACK) {
             findings.add("cut: " + labeled.getText() + " leaves its box");
         }
-        if (outer.getMinX() < -SLACK || outer.getMaxX() > scene.getWidth() + SLACK) {
-            findings.add("cut: " + labeled.getText() + " leaves the glass");
+    }
+
+    /** What cannot be scrolled into sight is in sight as a whole: on the glass, and not under the foot. */
+    private void inSight(Node node) {
+        if (!(node instanceof Control || node instanceof FieldBox) || node instanceof ScrollPane) {
+            return;
         }
+        Bounds bounds = node.localToScene(node.getLayoutBounds());
+        boolean aside = bounds.getMinX() < -SLACK || bounds.getMaxX() > width + SLACK;
+        boolean below = !within(node, ScrollPane.class) && !inFoot(node)
+                && (bounds.getMinY() < -SLACK || bounds.getMaxY() > Math.min(foot, height) + SLACK);
+        if (aside || below) {
+            findings.add("out of sight: " + name(node) + " at " + bounds);
+        }
+    }
+
+    private static boolean within(Node node, Class<? extends Node> kind) {
+        return node.getParent() != null && (kind.isInstance(node.getParent()) || within(node.getParent(), kind));
+    }
+
+    private static boolean inFoot(Node node) {
+        return node.getStyleClass().contains("foot-bar") || node.getParent() != null && inFoot(node.getParent());
+    }
+
+    private void contrast(TextInputControl input) {
+        input.lookupAll(".text").stream().filter(Text.class::isInstance).map(Text.class::cast)
+                .filter(text -> text.getFill() instanceof Color && !text.getText().isBlank())
+                .forEach(text -> ground(input).filter(ground -> contrast((Color) text.getFill(), ground) < 7)
+                        .ifPresent(ground -> findings.add("too faint: " + name(input) + " " + text.getFill() + " on "
+                                + ground)));
     }
 
     /** Text stands out from what it stands on by 7 to 1; a control that does nothing now may be fainter. */

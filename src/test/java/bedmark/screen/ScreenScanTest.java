@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.screen.part.CautionStrip;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
+import bedmark.screen.theme.TextSize;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.ArrayList;
@@ -16,7 +17,9 @@ import java.util.Optional;
 import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.Button;
+import javafx.scene.control.ButtonBase;
 import javafx.scene.control.Label;
+import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import javafx.scene.layout.Pane;
 import javafx.scene.layout.Region;
@@ -33,11 +36,36 @@ class ScreenScanTest {
     private final List<String> findings = new ArrayList<>();
     private TabletApp app;
 
-    private record Look(Locale language, boolean night, boolean gloves) {
+    /** How a screen is looked at; the glass is always 10.1 inches, with as many pixels as its density makes. */
+    private record Look(Locale language, boolean night, boolean gloves, double dpi, TextSize text) {
+        double scale() {
+            return dpi / Density.DEFAULT_DPI;
+        }
     }
 
-    private static final List<Look> LOOKS = List.of(new Look(Locale.ENGLISH, false, false),
-            new Look(SPANISH, true, false), new Look(Locale.ENGLISH, true, true), new Look(SPANISH, false, true));
+    /** Every two of language, light, hand and density meet in one of these; all of them meet at full size. */
+    private static final List<Look> PAIRS = List.of(new Look(Locale.ENGLISH, false, false, 149, TextSize.STANDARD),
+            new Look(SPANISH, true, true, 149, TextSize.STANDARD),
+            new Look(SPANISH, false, false, 224, TextSize.STANDARD),
+            new Look(Locale.ENGLISH, true, true, 224, TextSize.STANDARD),
+            new Look(Locale.ENGLISH, false, true, 299, TextSize.STANDARD),
+            new Look(SPANISH, true, false, 299, TextSize.STANDARD));
+
+    private static final List<Look> LOOKS = Boolean.getBoolean("bedmark.scan.full") ? all() : PAIRS;
+
+    private static List<Look> all() {
+        List<Look> looks = new ArrayList<>();
+        for (Locale language : List.of(Locale.ENGLISH, SPANISH)) {
+            for (boolean night : List.of(false, true)) {
+                for (boolean gloves : List.of(false, true)) {
+                    for (double dpi : List.of(149.0, 224.0, 299.0)) {
+                        looks.add(new Look(language, night, gloves, dpi, TextSize.STANDARD));
+                    }
+                }
+            }
+        }
+        return looks;
+    }
 
     @Test
     void landscape() throws Exception {
@@ -60,9 +88,16 @@ class ScreenScanTest {
             app.type("A. Vale");
             app.click("caution-read");
             scan("start", false);
+            app.click("to-settings");
+            app.until(() -> app.has("settings-done"));
+            scan("settings", false);
+            app.click("settings-done");
+            app.until(() -> app.has("start-walk"));
             app.click("start-walk");
             app.until(() -> app.has("search"));
-            scan("round", false);
+            scan("round", true);
+            scan("skip", false, "skip-TP-19");
+            scan("propose", true, "propose");
             app.click("stop-TP-19");
             app.until(() -> app.has("verdict"));
             scan("fresh", true);
@@ -87,14 +122,22 @@ class ScreenScanTest {
             app.until(() -> !app.has("correct"));
             app.click("slot-readings-bedDepths-2-depth");
             scan("depth", true);
-            app.click("every-rule");
-            scan("rules", true);
-            app.click("every-rule");
-            app.click("show-working");
-            scan("working", true);
+            scan("belt", true, "belt-state");
+            scan("rules", true, "every-rule");
+            scan("working", true, "every-rule", "show-working");
             app.click("slot-readings-seals-0-type");
             scan("seals", true);
+            app.click("foot-notes");
+            app.until(() -> app.has("to-readings"));
+            scan("notes", true);
+            scan("action", false, "action-1", "order-seal");
+            scan("photo", false, "photo-0");
             app.click("foot-round");
+            app.until(() -> app.has("to-finish"));
+            app.click("to-finish");
+            app.until(() -> app.has("sign-off"));
+            scan("finish", true);
+            app.click("foot-back");
             app.click("to-queue");
             scan("queue", false);
             app.click("queue-all");
@@ -105,31 +148,37 @@ class ScreenScanTest {
         assertEquals(List.of(), findings);
     }
 
-    private void scan(String screen, boolean caution) throws Exception {
-        for (Look look : LOOKS) {
-            Glass.on(() -> {
-                app.workplace().preferencesProperty().set(app.workplace().preferences().withLocale(look.language())
-                        .withNight(look.night()).withGloves(look.gloves()));
-                return null;
-            });
-            app.settle();
-            Glass.on(() -> {
+    /** @param presses what leads to a part of the screen that is not kept where the screen is shown anew */
+    private void scan(String screen, boolean caution, String... presses) throws Exception {
+        app.settle();
+        Glass.on(() -> {
+            for (Look look : LOOKS) {
+                prefer(look);
                 String where = screen + " " + look + ": ";
-                ScreenScan.of(app.shell().scene(), Shell.density(app.workplace().preferences()))
+                Scene scene = app.shell().scene();
+                for (String press : presses) {
+                    scene.getRoot().applyCss();
+                    scene.getRoot().layout();
+                    ((ButtonBase) scene.lookup("#" + press)).fire();
+                }
+                Density density = Shell.density(app.workplace().preferences());
+                ScreenScan.of(scene.getRoot(), density, Math.rint(scene.getWidth() * look.scale()),
+                        Math.rint(scene.getHeight() * look.scale()))
                         .forEach(finding -> findings.add("\n" + where + finding));
-                if (caution && !ScreenScan.hasCaution(app.shell().scene())) {
+                if (caution && !ScreenScan.hasCaution(scene)) {
                     findings.add("\n" + where + "the caution is absent");
                 }
-                return null;
-            });
-        }
-        Look first = LOOKS.get(0);
-        Glass.on(() -> {
-            app.workplace().preferencesProperty().set(app.workplace().preferences().withLocale(first.language())
-                    .withNight(first.night()).withGloves(first.gloves()));
+            }
+            prefer(PAIRS.get(0));
+            app.shell().scene().getRoot().resize(app.shell().scene().getWidth(), app.shell().scene().getHeight());
             return null;
         });
         app.settle();
+    }
+
+    private void prefer(Look look) {
+        app.workplace().preferencesProperty().set(app.workplace().preferences().withLocale(look.language())
+                .withNight(look.night()).withGloves(look.gloves()).withDpi(look.dpi()).withText(look.text()));
     }
 
     private static List<String> scanOf(Node... nodes) throws Exception {
@@ -180,6 +229,21 @@ class ScreenScanTest {
     @Test
     void scanFindsATextThatIsTooFaint() throws Exception {
         Label faint = Glass.on(() -> new Label("faint"));
+        faint.setStyle("-fx-text-fill: #999999;");
+        assertFound("too faint", scanOf(faint));
+    }
+
+    @Test
+    void scanFindsAButtonBelowTheGlass() throws Exception {
+        Button sunk = Glass.on(() -> new Button("sunk"));
+        sunk.setLayoutY(280);
+        assertFound("out of sight", scanOf(sunk));
+    }
+
+    @Test
+    void scanFindsTypedTextThatIsTooFaint() throws Exception {
+        TextField faint = Glass.on(() -> new TextField("faint"));
+        faint.setAccessibleText("faint");
         faint.setStyle("-fx-text-fill: #999999;");
         assertFound("too faint", scanOf(faint));
     }

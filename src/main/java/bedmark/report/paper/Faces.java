@@ -5,6 +5,7 @@ import bedmark.picture.TextMeasure;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.EnumMap;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -18,10 +19,16 @@ public final class Faces implements TextMeasure {
     /** Cap height and figures of the typeface rise 0.76 of its size; what hangs below the line takes 0.2. */
     private static final double ASCENT = 0.76;
     private static final double DESCENT = 0.2;
+    private static final int KEPT = 20_000;
 
     private final PDDocument document;
     private final Map<Face, EmbeddedFace> own = new EnumMap<>(Face.class);
     private Optional<EmbeddedFace> spare = Optional.empty();
+    /** Widths as a share of the size: a page is tried at several sizes. */
+    private final Map<Word, Double> widths = new HashMap<>();
+
+    private record Word(String text, Face face) {
+    }
 
     Faces(PDDocument document) {
         this.document = document;
@@ -81,12 +88,20 @@ public final class Faces implements TextMeasure {
 
     /** The width of a text (pt). */
     public double width(String text, Face face, double size) {
+        if (widths.size() > KEPT) {
+            widths.clear();
+        }
+        return widths.computeIfAbsent(new Word(text, face), word -> width(text, face)) * size;
+    }
+
+    private double width(String text, Face face) {
         double width = 0;
-        for (int character : text.codePoints().map(Faces::plain).toArray()) {
+        for (int i = 0; i < text.length(); i += Character.charCount(text.codePointAt(i))) {
+            int character = plain(text.codePointAt(i));
             EmbeddedFace one = faceOf(character, face);
             width += one.advance(known(one, character));
         }
-        return width * size;
+        return width;
     }
 
     /** As much of a text as fits, with an ellipsis where it is cut. */

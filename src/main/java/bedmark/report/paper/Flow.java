@@ -12,6 +12,8 @@ public final class Flow {
 
     private final Booklet booklet;
     private Leaf leaf;
+    private double side = SIDE;
+    private double top = TOP;
     private double y = TOP;
 
     /** Begins on a new page. */
@@ -38,12 +40,12 @@ public final class Flow {
     }
 
     public double left() {
-        return SIDE;
+        return side;
     }
 
     /** The room between the white at both sides. */
     public double width() {
-        return booklet.size().width() - 2 * SIDE;
+        return booklet.size().width() - 2 * side;
     }
 
     /** What is left of the page. */
@@ -53,12 +55,19 @@ public final class Flow {
 
     /** The room of a whole page. */
     public double page() {
-        return booklet.size().height() - FOOT - TOP;
+        return booklet.size().height() - FOOT - top;
     }
 
     public void nextLeaf() {
         leaf = booklet.leaf();
-        y = TOP;
+        y = top;
+    }
+
+    /** The same with less white, or more, at its sides and top (pt), for this page and those that follow. */
+    public void nextLeaf(double newSide, double newTop) {
+        side = newSide;
+        top = newTop;
+        nextLeaf();
     }
 
     /**
@@ -67,7 +76,7 @@ public final class Flow {
      * @return whether a new page was begun
      */
     public boolean need(double height) {
-        if (room() >= height || y == TOP) {
+        if (room() >= height || y == top) {
             return false;
         }
         nextLeaf();

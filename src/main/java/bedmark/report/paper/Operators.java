@@ -1,12 +1,12 @@
 package bedmark.report.paper;
 
-import java.math.BigDecimal;
-import java.math.RoundingMode;
 import java.nio.charset.StandardCharsets;
 
 /** The operators of one page's content, in their order. */
 final class Operators {
-    private static final int DECIMALS = 3;
+    private static final long THOUSAND = 1000;
+    /** No page is larger (pt). */
+    private static final double MOST = 1e9;
 
     private final StringBuilder text = new StringBuilder(1 << 13);
 
@@ -31,10 +31,18 @@ final class Operators {
 
     /** A number as PDF writes it: a decimal point and no exponent, whatever the locale. */
     static String number(double value) {
-        if (!Double.isFinite(value)) {
+        if (!(Math.abs(value) < MOST)) {
             throw new IllegalArgumentException("no place on paper: " + value);
         }
-        BigDecimal rounded = BigDecimal.valueOf(value).setScale(DECIMALS, RoundingMode.HALF_EVEN).stripTrailingZeros();
-        return rounded.signum() == 0 ? "0" : rounded.toPlainString();
+        long thousandths = Math.round(value * THOUSAND);
+        if (thousandths % THOUSAND == 0) {
+            return Long.toString(thousandths / THOUSAND);
+        }
+        String rest = Long.toString(THOUSAND + Math.abs(thousandths % THOUSAND)).substring(1);
+        int end = rest.length();
+        while (rest.charAt(end - 1) == '0') {
+            end--;
+        }
+        return (thousandths < 0 ? "-" : "") + Math.abs(thousandths / THOUSAND) + "." + rest.substring(0, end);
     }
 }

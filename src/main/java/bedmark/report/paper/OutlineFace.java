@@ -4,6 +4,7 @@ import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
+import java.util.HashMap;
 import java.util.Map;
 import java.util.Objects;
 import java.util.TreeMap;
@@ -34,6 +35,17 @@ final class OutlineFace implements EmbeddedFace {
     private final COSDictionary dictionary = new COSDictionary();
     /** Glyph to character. */
     private final Map<Integer, Integer> used = new TreeMap<>();
+    private final Map<Integer, Glyph> glyphs = new HashMap<>();
+
+    /**
+     * A character in the face.
+     *
+     * @param index   0 where the face has none
+     * @param advance as a share of the size of the type
+     * @param code    hexadecimal
+     */
+    private record Glyph(int index, double advance, String code) {
+    }
 
     OutlineFace(PDDocument document, String resource) {
         this.document = document;
@@ -49,12 +61,19 @@ final class OutlineFace implements EmbeddedFace {
 
     @Override
     public boolean covers(int character) {
-        return characters.getGlyphId(character) != 0;
+        return glyph(character).index() != 0;
     }
 
     @Override
     public double advance(int character) {
-        return width(characters.getGlyphId(character)) / em;
+        return glyph(character).advance();
+    }
+
+    private Glyph glyph(int character) {
+        return glyphs.computeIfAbsent(character, key -> {
+            int index = characters.getGlyphId(key);
+            return new Glyph(index, width(index) / em, hex(index));
+        });
     }
 
     private double width(int glyph) {
@@ -67,9 +86,9 @@ final class OutlineFace implements EmbeddedFace {
 
     @Override
     public String code(int character) {
-        int glyph = characters.getGlyphId(character);
-        used.putIfAbsent(glyph, character);
-        return hex(glyph);
+        Glyph glyph = glyph(character);
+        used.putIfAbsent(glyph.index(), character);
+        return glyph.code();
     }
 
     private static String hex(int number) {

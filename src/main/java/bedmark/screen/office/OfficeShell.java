@@ -14,6 +14,7 @@ import bedmark.screen.theme.Theme;
 import bedmark.survey.merge.ZoneId;
 import bedmark.wording.Wording;
 import java.util.Locale;
+import javafx.application.Platform;
 import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.Label;
@@ -90,6 +91,7 @@ public final class OfficeShell {
 
     /** Opens one zone. */
     public void zone(ZoneId zone) {
+        room = Room.WORST;
         show(new ZoneStoryView(desk, new ZoneStoryModel(desk, zone), begin(), () -> open(Room.WORST)));
     }
 
@@ -102,6 +104,8 @@ public final class OfficeShell {
     private void show(Node content) {
         root.setTop(head());
         root.setCenter(content);
+        // The name at the top would take the first keys.
+        Platform.runLater(content::requestFocus);
     }
 
     private Node head() {
@@ -122,7 +126,9 @@ public final class OfficeShell {
         person.setAccessibleText(wording.text("office.person"));
         person.textProperty().addListener((property, before, now) ->
                 desk.preferencesProperty().set(desk.preferences().withPerson(now.strip())));
-        TopBar bar = new TopBar(person, words, light);
+        HBox more = new HBox(person, words, light);
+        more.getStyleClass().add("more");
+        TopBar bar = new TopBar(more);
         bar.titleProperty().set(wording.text("screen.name"));
         bar.subtitleProperty().set(wording.text("office.title"));
         return new VBox(bar, rooms(wording), progress(wording), trouble(wording));

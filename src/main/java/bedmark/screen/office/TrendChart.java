@@ -72,8 +72,8 @@ final class TrendChart extends Pane {
         if (width <= 0 || height <= 0) {
             return;
         }
-        for (int i = 0; i <= TICKS; i++) {
-            double value = top * i / TICKS;
+        double step = step();
+        for (double value = 0; value <= top; value += step) {
             double y = y(value, height);
             add("grid", new Line(left, y, left + width, y));
             Text text = text("axis", shown.apply(value), 0, y);
@@ -90,6 +90,14 @@ final class TrendChart extends Pane {
         for (Observation one : series.observations()) {
             before = point(one, left, width, height, before);
         }
+    }
+
+    /** A round step that gives about four lines: 1, 2 or 5 times a power of ten. */
+    private double step() {
+        double rough = top / TICKS;
+        double power = Math.pow(10, Math.floor(Math.log10(rough)));
+        double digit = rough / power;
+        return power * (digit <= 1 ? 1 : digit <= 2 ? 2 : digit <= 5 ? 5 : 10);
     }
 
     private double x(double day, double left, double width) {

@@ -47,6 +47,11 @@ final class WorstView extends VBox {
         });
         VBox.setVgrow(list, Priority.ALWAYS);
         getChildren().addAll(filters, list);
+        focusedProperty().addListener((property, before, now) -> {
+            if (now) {
+                list.requestFocus();
+            }
+        });
     }
 
     private static void chosen(ListView<RankedZone> list, Consumer<ZoneId> open) {

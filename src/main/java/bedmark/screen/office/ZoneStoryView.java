@@ -159,6 +159,7 @@ final class ZoneStoryView extends ScrollPane {
                 + one.answer().code(), one.person(), one.until().map(LocalDate::toString).orElse("–"),
                 one.reason()))));
         text.setMinWidth(0);
+        text.setAlignment(Pos.CENTER_LEFT);
         HBox.setHgrow(text, Priority.ALWAYS);
         HBox row = new HBox(text);
         row.getStyleClass().add("finding-row");

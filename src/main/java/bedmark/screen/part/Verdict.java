@@ -12,15 +12,33 @@ import java.util.Optional;
  * @param levelWord the level in one word, for who cannot see the shape
  * @param sentence  the verdict as a sentence
  * @param sure      how sure it is
+ * @param remarks   what stands in one line below the sentence: the number against its limit, the verdict at design feed
  * @param figures   up to four numbers
  * @param advice    the one action that helps most, or the reading to take next
  */
-public record Verdict(LevelShape level, String levelWord, String sentence, String sure, List<Figure> figures,
-                      Optional<String> advice) {
+public record Verdict(LevelShape level, String levelWord, String sentence, String sure, List<Remark> remarks,
+                      List<Figure> figures, Optional<String> advice) {
     /** How many figures a glance takes in. */
     public static final int FIGURES = 4;
 
+    /**
+     * A remark, with the shape of the level that it is about, where it is about one.
+     */
+    public record Remark(Optional<LevelShape> level, String words) {
+        public Remark {
+            Objects.requireNonNull(level);
+            Objects.requireNonNull(words);
+        }
+    }
+
+    /** A verdict without remarks. */
+    public Verdict(LevelShape level, String levelWord, String sentence, String sure, List<Figure> figures,
+                   Optional<String> advice) {
+        this(level, levelWord, sentence, sure, List.of(), figures, advice);
+    }
+
     public Verdict {
+        remarks = List.copyOf(remarks);
         Objects.requireNonNull(level);
         Objects.requireNonNull(levelWord);
         Objects.requireNonNull(sentence);

@@ -3,45 +3,47 @@ package bedmark.screen.part;
 import bedmark.screen.theme.LevelGlyph;
 import bedmark.screen.theme.LevelShape;
 import java.util.List;
-import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
-import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** The verdict on the spot: shape, sentence, how sure, four numbers, one action. */
 public final class VerdictBlock extends VBox {
     private final LevelGlyph glyph = new LevelGlyph(LevelShape.INCOMPLETE);
     private final Label sentence = Labels.wrapped("sentence", "");
-    private final Label sure = Labels.label("sure");
+    private final Label sure = Labels.wrapped("sure", "");
+    private final FlowPane remarks = new FlowPane();
     private final Label advice = Labels.wrapped("advice", "");
     private final List<FigureBlock> figures = Stream.generate(FigureBlock::new).limit(Verdict.FIGURES).toList();
     private final GridPane numbers = grid();
+    private Verdict shown;
 
     /**
-     * @param action what can be done about it, beside the advice; usually one button
+     * @param actions what can be done about it, beside the advice; at most two buttons
      */
-    public VerdictBlock(Optional<Node> action) {
+    public VerdictBlock(List<? extends Node> actions) {
         getStyleClass().add("verdict");
         HBox head = new HBox(glyph, sentence, sure);
         head.getStyleClass().add("head");
         head.setAlignment(Pos.CENTER_LEFT);
         HBox.setHgrow(sentence, Priority.ALWAYS);
         sentence.setMaxWidth(Double.MAX_VALUE);
-        sure.setMinWidth(Region.USE_PREF_SIZE);
+        remarks.getStyleClass().add("remarks");
+        remarks.managedProperty().bind(remarks.visibleProperty());
         HBox foot = new HBox(advice);
         foot.getStyleClass().add("foot");
         foot.setAlignment(Pos.CENTER_LEFT);
         HBox.setHgrow(advice, Priority.ALWAYS);
         advice.setMaxWidth(Double.MAX_VALUE);
-        action.ifPresent(foot.getChildren()::add);
-        getChildren().addAll(head, numbers, foot);
+        foot.getChildren().addAll(actions);
+        getChildren().addAll(head, remarks, numbers, foot);
         setFocusTraversable(false);
     }
 
@@ -58,13 +60,34 @@ public final class VerdictBlock extends VBox {
         return grid;
     }
 
+    private static HBox remark(Verdict.Remark remark) {
+        HBox line = new HBox();
+        line.getStyleClass().add("remark");
+        line.setAlignment(Pos.CENTER_LEFT);
+        remark.level().ifPresent(level -> line.getChildren().add(new LevelGlyph(level)));
+        line.getChildren().add(Labels.label("words", remark.words()));
+        return line;
+    }
+
     public void show(Verdict verdict) {
+        if (verdict.equals(shown)) {
+            return;
+        }
+        boolean other = shown == null || shown.level() != verdict.level();
+        if (shown == null || !shown.remarks().equals(verdict.remarks())) {
+            remarks.getChildren().setAll(verdict.remarks().stream().map(VerdictBlock::remark).toList());
+            remarks.setVisible(!verdict.remarks().isEmpty());
+        }
+        shown = verdict;
         glyph.levelProperty().set(verdict.level());
         glyph.setAccessibleText(verdict.levelWord());
         sentence.setText(verdict.sentence());
-        sure.setText(verdict.sure());
+        // The number over its words: the column beside the sentence stays narrow.
+        sure.setText(verdict.sure().replaceFirst("% ", "%\n"));
         advice.setText(verdict.advice().orElse(""));
-        getStyleClass().setAll("verdict", verdict.level().styleClass());
+        if (other) {
+            getStyleClass().setAll("verdict", verdict.level().styleClass());
+        }
         numbers.setVisible(!verdict.figures().isEmpty());
         numbers.setManaged(!verdict.figures().isEmpty());
         for (int i = 0; i < figures.size(); i++) {

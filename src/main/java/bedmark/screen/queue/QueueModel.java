@@ -107,6 +107,7 @@ public final class QueueModel {
         }
         workplace.preferencesProperty().set(workplace.preferences().withExportFolder(folder.toString()));
         left.set(Optional.empty());
+        receipts.clear();
         String notice = workplace.wording().text("command.notice");
         String person = person();
         errand.run(progress -> {
@@ -121,6 +122,7 @@ public final class QueueModel {
 
     /** Reads the office's receipts from a folder or stick. */
     public void readReceipts(Path given) {
+        left.set(Optional.empty());
         receipts.read(given, this::reload);
     }
 

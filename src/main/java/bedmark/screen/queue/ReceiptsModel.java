@@ -31,14 +31,18 @@ public final class ReceiptsModel {
      *
      * @param outcomes of those that were noted
      * @param unknown  a receipt of each office that is not known
-     * @param defects  of those that were refused
+     * @param refused  those that were refused
      */
-    public record Result(List<ReceiptBook.Outcome> outcomes, List<SignedReceipt> unknown, List<Defect> defects) {
+    public record Result(List<ReceiptBook.Outcome> outcomes, List<SignedReceipt> unknown, List<Wrong> refused) {
         public Result {
             outcomes = List.copyOf(outcomes);
             unknown = List.copyOf(unknown);
-            defects = List.copyOf(defects);
+            refused = List.copyOf(refused);
         }
+    }
+
+    /** A file that is no sound receipt for this tablet. */
+    public record Wrong(String file, Defect defect) {
     }
 
     ReceiptsModel(Workplace workplace, Errand errand) {
@@ -49,6 +53,11 @@ public final class ReceiptsModel {
 
     public ReadOnlyObjectProperty<Optional<Result>> resultProperty() {
         return result.getReadOnlyProperty();
+    }
+
+    /** Forgets what was read, when something else is told. */
+    void clear() {
+        result.set(Optional.empty());
     }
 
     /** Reads the receipts of a folder, or one. */
@@ -71,7 +80,7 @@ public final class ReceiptsModel {
     private Result readAll(Path given, String person, Set<Fingerprint> trusted) {
         List<ReceiptBook.Outcome> outcomes = new ArrayList<>();
         List<SignedReceipt> unknown = new ArrayList<>();
-        List<Defect> defects = new ArrayList<>();
+        List<Wrong> refused = new ArrayList<>();
         for (Path file : ReceiptBook.find(given)) {
             try {
                 SignedReceipt signed = ReceiptReader.read(file);
@@ -81,9 +90,9 @@ public final class ReceiptsModel {
                     unknown.add(signed);
                 }
             } catch (Refused e) {
-                defects.add(e.defect());
+                refused.add(new Wrong(file.getFileName().toString(), e.defect()));
             }
         }
-        return new Result(outcomes, unknown, defects);
+        return new Result(outcomes, unknown, refused);
     }
 }

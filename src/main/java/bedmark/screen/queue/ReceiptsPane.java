@@ -22,7 +22,8 @@ final class ReceiptsPane extends VBox {
         getChildren().add(new SectionHeader(wording.text("queue.receipts")));
         result.unknown().forEach(unknown -> getChildren().add(question(unknown, model, then)));
         result.outcomes().forEach(this::told);
-        result.defects().forEach(defect -> getChildren().add(Texts.trouble(wording.sentence(defect))));
+        result.refused().forEach(wrong -> getChildren().add(Texts.trouble(Wording.plain(wrong.file()) + ": "
+                + wording.sentence(wrong.defect()))));
     }
 
     private VBox question(SignedReceipt unknown, ReceiptsModel model, Runnable then) {

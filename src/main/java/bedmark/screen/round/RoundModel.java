@@ -10,10 +10,12 @@ import bedmark.screen.Site;
 import bedmark.screen.Workplace;
 import bedmark.survey.Act;
 import bedmark.survey.InspectionStatus;
+import bedmark.survey.PlannedAction;
 import bedmark.survey.QueueState;
 import bedmark.survey.Register;
 import bedmark.survey.Round;
 import bedmark.survey.Survey;
+import java.time.LocalDate;
 import java.time.OffsetDateTime;
 import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
@@ -22,9 +24,12 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.UUID;
+import java.util.function.BiConsumer;
 import java.util.function.Consumer;
+import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 
@@ -33,6 +38,7 @@ public final class RoundModel {
     private final Workplace workplace;
     private final Round round;
     private final StringProperty search = new SimpleStringProperty("");
+    private final BooleanProperty waitingOnly = new SimpleBooleanProperty();
     private final ReadOnlyObjectWrapper<List<RoundRow>> rows = new ReadOnlyObjectWrapper<>(List.of());
     private final ReadOnlyObjectWrapper<List<RoundRow>> shown = new ReadOnlyObjectWrapper<>(List.of());
 
@@ -40,6 +46,7 @@ public final class RoundModel {
         this.workplace = workplace;
         this.round = round;
         search.addListener((property, before, now) -> filter());
+        waitingOnly.addListener((property, before, now) -> filter());
         reload();
     }
 
@@ -73,32 +80,103 @@ public final class RoundModel {
         List<RoundRow> read = new ArrayList<>();
         for (Round.Point point : round.points()) {
             site.register().transfer(point.transfer()).ifPresent(transfer -> read.add(row(transfer,
-                    site.register(), areas, Optional.ofNullable(lines.get(transfer.id())))));
+                    site.register(), areas, Optional.ofNullable(lines.get(transfer.id())),
+                    point.dueBy().or(round::dueBy))));
         }
         rows.set(List.copyOf(read));
         filter();
     }
 
     private RoundRow row(Register.Transfer transfer, Register register, Map<String, String> areas,
-                         Optional<SurveyLine> line) {
+                         Optional<SurveyLine> line, Optional<LocalDate> dueBy) {
         String conveyor = register.conveyorOf(transfer).tag();
+        Optional<SurveyLine> last = lastLine(transfer);
         return new RoundRow(transfer.id(), transfer.tag(),
                 transfer.from().map(from -> from + " \u2192 " + conveyor).orElse(conveyor),
-                transfer.area().map(area -> areas.getOrDefault(area, area)).orElse(""), line, lastLevel(transfer));
+                transfer.area().map(area -> areas.getOrDefault(area, area)).orElse(""), line,
+                last.map(found -> new RoundRow.Last(found.level(), found.completedAt().or(found::startedAt)
+                        .map(OffsetDateTime::toLocalDate))), dueBy, notes(transfer, last));
+    }
+
+    /** What the office noted there and knows to be open, and what the last survey left open. */
+    private int notes(Register.Transfer transfer, Optional<SurveyLine> last) {
+        long left = last.flatMap(line -> workplace.store().history(line.id())).stream()
+                .flatMap(history -> PlannedAction.of(history.survey().document(), PlannedAction.KEY).stream())
+                .filter(action -> !action.done()).count();
+        return transfer.document().series("officeNotes").size() + (int) left
+                + PlannedAction.of(transfer.document(), "openActions").size();
     }
 
     /** What other rounds found at a transfer point last. */
-    private String lastLevel(Register.Transfer transfer) {
-        return workplace.store().surveys(SurveyQuery.ALL.ofTransfer(transfer.id()).current()
-                        .in(QueueState.COMPLETED, QueueState.QUEUED, QueueState.EXPORTED, QueueState.RECEIVED)).stream()
-                .filter(line -> !line.round().equals(Optional.of(round.id())))
-                .filter(line -> line.inspectionStatus() == InspectionStatus.INSPECTED)
-                .reduce((earlier, later) -> later).map(SurveyLine::level).orElse("");
+    private Optional<SurveyLine> lastLine(Register.Transfer transfer) {
+        return workplace.store().surveys(SurveyQuery.ALL.ofTransfer(transfer.id()).besideRound(round.id()).current()
+                .inspected().in(QueueState.COMPLETED, QueueState.QUEUED, QueueState.EXPORTED, QueueState.RECEIVED)
+                .newest(1)).stream().findFirst();
     }
 
     private void filter() {
         String typed = search.get();
-        shown.set(typed.isBlank() ? rows.get() : rows.get().stream().filter(row -> row.matches(typed)).toList());
+        shown.set(rows.get().stream().filter(row -> !waitingOnly.get() || row.waits())
+                .filter(row -> typed.isBlank() || row.matches(typed)).toList());
+    }
+
+    /** Whether only the stops are shown that still wait. */
+    public BooleanProperty waitingOnlyProperty() {
+        return waitingOnly;
+    }
+
+    public LocalDate today() {
+        return LocalDate.now(workplace.clock());
+    }
+
+    /** How many stops wait though their day has passed. */
+    public long overdue() {
+        return rows.get().stream().filter(row -> row.overdue(today())).count();
+    }
+
+    /** What was found on this round beside the register, in the order in which it was proposed. */
+    public List<Branch> proposals() {
+        return workplace.store().proposals().stream()
+                .filter(proposal -> proposal.text("round").equals(Optional.of(round.id()))).toList();
+    }
+
+    /**
+     * Proposes a transfer point that is not in the register; the office decides about it.
+     *
+     * @param after the registered stop behind which it lies on the walk
+     */
+    public void propose(String tag, String from, String onto, Optional<String> after, String note, Runnable then) {
+        UUID id = UUID.randomUUID();
+        Branch[] proposal = {Branch.EMPTY.with("id", id.toString()).with("round", round.id()).with("tag", tag.strip())};
+        BiConsumer<String, String> put = (key, text) -> {
+            if (!text.isBlank()) {
+                proposal[0] = proposal[0].with(key, text.strip());
+            }
+        };
+        put.accept("from", from);
+        put.accept("onto", onto);
+        put.accept("note", note);
+        after.ifPresent(stop -> {
+            put.accept("after", stop);
+            workplace.site().register().transfer(stop).flatMap(Register.Transfer::area)
+                    .ifPresent(area -> put.accept("area", area));
+        });
+        put.accept("proposedBy", person());
+        Branch made = proposal[0].with("proposedAt", Node.time(OffsetDateTime.now(workplace.clock())
+                .truncatedTo(ChronoUnit.SECONDS)));
+        workplace.scribe().save(person(), new Act.PointProposed(id, made), entry -> {
+            reload();
+            then.run();
+        });
+    }
+
+    /** Takes a proposal back. */
+    public void withdraw(Branch proposal, Runnable then) {
+        proposal.uuid("id").ifPresent(id -> workplace.scribe().save(person(),
+                new Act.PointProposed(id, Branch.EMPTY), entry -> {
+                    reload();
+                    then.run();
+                }));
     }
 
     /** How many stops need nothing more. */
@@ -125,6 +203,11 @@ public final class RoundModel {
     public Optional<RoundRow> beside(String transfer, int step) {
         int wanted = index(transfer) + step;
         return wanted >= 0 && wanted < rows.get().size() ? Optional.of(rows.get().get(wanted)) : Optional.empty();
+    }
+
+    /** The stop at a transfer point. */
+    public Optional<RoundRow> row(String transfer) {
+        return beside(transfer, 0);
     }
 
     private int index(String transfer) {

@@ -3,6 +3,7 @@ package bedmark.screen.round;
 import bedmark.index.SurveyLine;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.QueueState;
+import java.time.LocalDate;
 import java.util.Locale;
 import java.util.Optional;
 
@@ -14,10 +15,20 @@ import java.util.Optional;
  * @param what      what is fed onto what
  * @param area      the area's name
  * @param survey    this round's survey of it, where one was begun
- * @param lastLevel the level that was found last time; empty where there is none
+ * @param last     what was found last time
+ * @param dueBy    the last day on which it is to be surveyed, where one is set
+ * @param notes    how many notes of the office and actions are open there
  */
 public record RoundRow(String transfer, String tag, String what, String area, Optional<SurveyLine> survey,
-                       String lastLevel) {
+                       Optional<Last> last, Optional<LocalDate> dueBy, int notes) {
+
+    /**
+     * The last finished survey of another round.
+     *
+     * @param level what it found; may be empty
+     */
+    public record Last(String level, Optional<LocalDate> on) {
+    }
 
     /** How far a stop is. */
     public enum Progress { TO_DO, BEGUN, DONE, SKIPPED }
@@ -29,6 +40,16 @@ public record RoundRow(String transfer, String tag, String what, String area, Op
             }
             return line.inspectionStatus() == InspectionStatus.INSPECTED ? Progress.DONE : Progress.SKIPPED;
         }).orElse(Progress.TO_DO);
+    }
+
+    /** Whether it waits for its survey. */
+    public boolean waits() {
+        return progress() == Progress.TO_DO || progress() == Progress.BEGUN;
+    }
+
+    /** Whether it waits though its day has passed. */
+    public boolean overdue(LocalDate today) {
+        return waits() && dueBy.filter(day -> day.isBefore(today)).isPresent();
     }
 
     /** The level that stands: this round's where it was surveyed, and nothing else. */

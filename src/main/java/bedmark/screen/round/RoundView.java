@@ -1,15 +1,20 @@
 package bedmark.screen.round;
 
+import bedmark.document.Branch;
 import bedmark.screen.Heads;
 import bedmark.screen.Navigator;
 import bedmark.screen.SidedScreen;
 import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.CautionStrip;
 import bedmark.screen.part.FootBar;
+import bedmark.screen.part.Labels;
+import bedmark.screen.part.Plate;
 import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Icon;
+import bedmark.screen.theme.IconView;
 import bedmark.screen.theme.LevelGlyph;
 import bedmark.screen.theme.LevelShape;
 import bedmark.survey.InspectionStatus;
@@ -24,11 +29,14 @@ import javafx.geometry.Pos;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.control.ToggleButton;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
+import javafx.scene.layout.Pane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
 import org.controlsfx.control.textfield.CustomTextField;
 
@@ -39,6 +47,7 @@ public final class RoundView extends SidedScreen {
     private final Navigator navigator;
     private final Wording wording;
     private final VBox list = new VBox();
+    private final VBox stops = new VBox();
     private final ScrollPane scroll = new ScrollPane(list);
     private boolean portrait;
     private final CustomTextField search = new CustomTextField();
@@ -49,14 +58,19 @@ public final class RoundView extends SidedScreen {
         this.model = model;
         this.navigator = navigator;
         this.wording = workplace.wording();
-        frame(Heads.head(workplace, listening, model.round().name(), workplace.site().register().name()),
+        ActionButton settings = ActionButton.with(Icon.SETTINGS, ContentDisplay.LEFT, Weight.PLAIN,
+                wording.text("settings.title"), navigator::toSettings);
+        settings.setId("to-settings");
+        settings.getStyleClass().add("secondary-target");
+        frame(Heads.head(workplace, listening, model.round().name(), workplace.site().register().name(), settings),
                 footBar());
         list.getStyleClass().add("rows");
         scroll.setFitToWidth(true);
         scroll.getStyleClass().add("form-scroll");
         VBox.setVgrow(scroll, Priority.ALWAYS);
-        VBox stops = new VBox(searchField(), scroll);
+        stops.getChildren().setAll(finder(), scroll);
         stops.getStyleClass().add("stops");
+        scroll.setFocusTraversable(false);
         side.getStyleClass().add("summary");
         body.getStyleClass().add("round-body");
         body.setCenter(stops);
@@ -65,10 +79,37 @@ public final class RoundView extends SidedScreen {
         summarise();
     }
 
+    /** The search, and beside it which stops are shown at all. */
+    private HBox finder() {
+        HBox finder = new HBox(searchField(), shownStops("show-all", "walk.all", false),
+                shownStops("show-waiting", "walk.waiting", true));
+        finder.getStyleClass().add("row");
+        HBox.setHgrow(search, Priority.ALWAYS);
+        return finder;
+    }
+
+    private ToggleButton shownStops(String id, String key, boolean waiting) {
+        ToggleButton button = new ToggleButton(wording.text(key));
+        button.setId(id);
+        button.getStyleClass().add("secondary-target");
+        button.setMinWidth(Region.USE_PREF_SIZE);
+        button.setOnAction(event -> {
+            button.setSelected(true);
+            model.waitingOnlyProperty().set(waiting);
+        });
+        listening.to(model.waitingOnlyProperty(), only -> button.setSelected(only == waiting));
+        return button;
+    }
+
     private CustomTextField searchField() {
         search.setId("search");
         search.setPromptText(wording.text("screen.round.search"));
         search.setAccessibleText(wording.text("screen.round.search"));
+        search.getStyleClass().add("secondary-target");
+        IconView glass = new IconView(Icon.FIND);
+        StackPane left = new StackPane(glass);
+        left.getStyleClass().add("search-icon");
+        search.setLeft(left);
         search.textProperty().bindBidirectional(model.searchProperty());
         return search;
     }
@@ -88,15 +129,63 @@ public final class RoundView extends SidedScreen {
             nothing.setWrapText(true);
             list.getChildren().add(nothing);
         }
+        proposals();
+    }
+
+    /** What was found beside the register, and the way to propose more. */
+    private void proposals() {
+        List<Branch> proposals = model.proposals();
+        if (!proposals.isEmpty()) {
+            list.getChildren().add(new SectionHeader(wording.text("walk.proposed")));
+        }
+        for (int i = 0; i < proposals.size(); i++) {
+            Branch proposal = proposals.get(i);
+            Label tag = new Label(proposal.text("tag").orElse(""));
+            tag.getStyleClass().add("tag");
+            Label note = Labels.wrapped("what", proposal.text("note").or(() -> proposal.text("from")).orElse(""));
+            VBox names = new VBox(tag, note);
+            HBox.setHgrow(names, Priority.ALWAYS);
+            ActionButton withdraw = new ActionButton(Weight.QUIET, wording.text("walk.withdraw"),
+                    () -> model.withdraw(proposal, this::layOut));
+            withdraw.setId("withdraw-" + i);
+            withdraw.setAccessibleText(wording.text("walk.withdraw") + ": " + tag.getText());
+            withdraw.getStyleClass().add("secondary-target");
+            HBox row = new HBox(names, withdraw);
+            row.getStyleClass().addAll("rule-row", "proposal");
+            row.setAlignment(Pos.CENTER_LEFT);
+            list.getChildren().add(row);
+        }
+        ActionButton propose = ActionButton.with(Icon.PLUS, ContentDisplay.LEFT, Weight.QUIET,
+                wording.text("walk.propose"), this::propose);
+        propose.setId("propose");
+        propose.getStyleClass().add("secondary-target");
+        propose.setMaxWidth(Double.MAX_VALUE);
+        list.getChildren().add(propose);
+    }
+
+    private void propose() {
+        ProposalForm form = new ProposalForm(wording, model, () -> {
+            stops.getChildren().setAll(finder(), scroll);
+            layOut();
+        });
+        stops.getChildren().setAll(form);
+        form.begin();
     }
 
     private HBox stop(RoundRow row) {
         LevelGlyph glyph = new LevelGlyph(shape(row));
         Label tag = new Label(row.tag());
         tag.getStyleClass().add("tag");
+        tag.setMinWidth(Region.USE_PREF_SIZE);
         Label what = new Label(row.what());
         what.getStyleClass().add("what");
-        VBox names = new VBox(tag, what);
+        HBox first = new HBox(tag);
+        first.getStyleClass().add("names");
+        first.setAlignment(Pos.CENTER_LEFT);
+        if (row.notes() > 0) {
+            first.getChildren().add(new Plate(Plate.Tone.FAINT, wording.text("walk.notes", row.notes())));
+        }
+        VBox names = new VBox(first, what);
         names.setAlignment(Pos.CENTER_LEFT);
         HBox.setHgrow(names, Priority.ALWAYS);
         names.setMinWidth(0);
@@ -108,7 +197,8 @@ public final class RoundView extends SidedScreen {
         open.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
         open.setId("stop-" + row.transfer());
         open.setAccessibleText(row.tag() + ", " + row.what() + ", " + now(row).map(now -> now + ", ").orElse("")
-                + last(row));
+                + due(row).map(due -> due + ", ").orElse("") + last(row)
+                + (row.notes() > 0 ? ", " + wording.text("walk.notes", row.notes()) : ""));
         open.getStyleClass().add("secondary-target");
         open.setMaxWidth(Double.MAX_VALUE);
         content.prefWidthProperty().bind(open.widthProperty().subtract(36));
@@ -138,8 +228,14 @@ public final class RoundView extends SidedScreen {
             now.getStyleClass().addAll("now", row.level().isEmpty() ? "none" : row.level());
             states.getChildren().add(now);
         });
-        Label last = new Label(last(row));
-        last.getStyleClass().add("state");
+        due(row).ifPresent(words -> {
+            Label due = new Label(words);
+            due.getStyleClass().addAll("now", row.overdue(model.today()) ? "overdue" : "due");
+            states.getChildren().setAll(due);
+        });
+        Label last = new Label(row.last().flatMap(RoundRow.Last::on).isEmpty() ? last(row)
+                : wording.text("walk.last-dated", level(row.last().get()), wording.day(row.last().get().on().get())));
+        last.getStyleClass().addAll("state", "ghost");
         states.getChildren().add(last);
         states.setMinWidth(Region.USE_PREF_SIZE);
         return states;
@@ -156,9 +252,22 @@ public final class RoundView extends SidedScreen {
         };
     }
 
+    /** By when a stop that waits is to be done. */
+    private Optional<String> due(RoundRow row) {
+        return row.dueBy().filter(day -> row.waits()).map(day -> wording.text(row.overdue(model.today())
+                ? "walk.overdue" : "walk.due", wording.day(day)));
+    }
+
+    private String level(RoundRow.Last last) {
+        return wording.text("verdict.level." + (last.level().isEmpty() ? "incomplete" : last.level()));
+    }
+
     private String last(RoundRow row) {
-        return row.lastLevel().isEmpty() ? wording.text("screen.round.never")
-                : wording.text("screen.round.last", wording.text("verdict.level." + row.lastLevel()));
+        return row.last().filter(last -> !last.level().isEmpty()).map(last -> {
+            String level = level(last);
+            return last.on().map(on -> wording.text("walk.last", level, wording.day(on)))
+                    .orElseGet(() -> wording.text("screen.round.last", level));
+        }).orElseGet(() -> wording.text("screen.round.never"));
     }
 
     /** Brings the stop where the walk goes on in sight, with the one before it. */
@@ -228,14 +337,23 @@ public final class RoundView extends SidedScreen {
             found.add(line, portrait ? place / 3 : 0, portrait ? place % 3 : place);
             place++;
         }
+        if (model.overdue() > 0) {
+            side.getChildren().add(Labels.wrapped("overdue-count", wording.text("walk.overdue-count",
+                    model.overdue())));
+        }
+        ActionButton end = ActionButton.with(Icon.FLAG, ContentDisplay.LEFT, Weight.PLAIN,
+                wording.text("walk.finish"), () -> navigator.toFinish(model));
+        end.setId("to-finish");
         ActionButton export = ActionButton.with(Icon.EXPORT, ContentDisplay.LEFT, Weight.PLAIN,
                 wording.text("screen.round.export"), () -> navigator.toQueue(model));
         export.setId("to-queue");
-        export.setMaxWidth(Double.MAX_VALUE);
-        Label caution = new Label(wording.text("screen.caution.always"));
-        caution.setWrapText(true);
-        caution.setMinHeight(Region.USE_PREF_SIZE);
-        side.getChildren().addAll(export, caution);
+        Pane ways = portrait ? new HBox(end, export) : new VBox(end, export);
+        ways.getStyleClass().add("moves");
+        for (ActionButton way : List.of(end, export)) {
+            way.setMaxWidth(Double.MAX_VALUE);
+            HBox.setHgrow(way, Priority.ALWAYS);
+        }
+        side.getChildren().addAll(ways, new CautionStrip(wording.text("screen.caution.always")));
     }
 
     private FootBar footBar() {
@@ -244,11 +362,15 @@ public final class RoundView extends SidedScreen {
         ActionButton back = ActionButton.with(Icon.BACK, ContentDisplay.LEFT, Weight.QUIET,
                 wording.text("screen.start.title"), navigator::toStart);
         back.setId("foot-back");
-        Optional<RoundRow> next = model.nextToDo("");
-        ActionButton onward = next.map(row -> ActionButton.with(Icon.NEXT, ContentDisplay.RIGHT, Weight.PRIMARY,
-                        wording.text("screen.round.next", row.tag()), () -> navigator.toZone(model, row)))
-                .orElseGet(() -> ActionButton.with(Icon.NEXT, ContentDisplay.RIGHT, Weight.PRIMARY,
-                        wording.text("screen.round.export"), () -> navigator.toQueue(model)));
+        ActionButton onward = ActionButton.with(Icon.NEXT, ContentDisplay.RIGHT, Weight.PRIMARY, "",
+                () -> model.nextToDo("").ifPresentOrElse(row -> navigator.toZone(model, row),
+                        () -> navigator.toFinish(model)));
+        listening.to(model.rowsProperty(), rows -> {
+            String words = model.nextToDo("").map(row -> wording.text("screen.round.next", row.tag()))
+                    .orElse(wording.text("walk.finish"));
+            onward.setText(words);
+            onward.setAccessibleText(words);
+        });
         onward.setId("foot-next");
         return new FootBar(Optional.of(back), Optional.of(ticks), Optional.of(onward));
     }

@@ -46,18 +46,36 @@ public final class StartModel {
         person.set(workplace.preferences().person());
         person.addListener((property, before, now) ->
                 workplace.preferencesProperty().set(workplace.preferences().withPerson(now.strip())));
-        workplace.siteProperty().addListener((property, before, now) -> chooseRound());
+        round.addListener((property, before, now) -> recall());
+        person.addListener((property, before, now) -> recall());
         chooseRound();
+        recall();
         ready = Bindings.createBooleanBinding(() -> !person.get().isBlank() && round.get() != null
                 && cautionRead.get(), person, round, cautionRead);
     }
 
-    /** The round that was walked last and is not finished, else the first one. */
-    private void chooseRound() {
+    /** Told when there is a plant: the round that was walked last and is not finished, else the first one. */
+    public void chooseRound() {
+        if (round.get() != null) {
+            return;
+        }
         List<Round> rounds = rounds();
         round.set(workplace.store().walks().stream().filter(walk -> walk.underWay())
                 .flatMap(walk -> rounds.stream().filter(one -> one.id().equals(walk.round()))).findFirst()
                 .orElse(rounds.isEmpty() ? null : rounds.get(0)));
+    }
+
+    /** The caution is acknowledged once a walk: whoever goes on with their own need not do so again. */
+    private void recall() {
+        if (round.get() != null && goesOn()) {
+            cautionRead.set(true);
+        }
+    }
+
+    /** Whether the chosen round is being walked by this person already. */
+    public boolean goesOn() {
+        return workplace.store().walk(round.get().id()).filter(walk -> walk.underWay()
+                && walk.person().equals(person.get().strip())).isPresent();
     }
 
     public StringProperty personProperty() {
@@ -99,8 +117,12 @@ public final class StartModel {
         return workplace.siteProperty().get().map(Site::rounds).orElse(List.of());
     }
 
-    /** Starts the walk. */
+    /** Starts the walk, or goes on with it. */
     public void start(Runnable then) {
+        if (goesOn()) {
+            then.run();
+            return;
+        }
         workplace.scribe().save(person.get(), new Act.WalkStarted(round.get().id()), entry -> then.run());
     }
 

@@ -2,16 +2,20 @@ package bedmark.screen.start;
 
 import bedmark.quantity.UnitSystem;
 import bedmark.screen.Heads;
+import bedmark.screen.Lighting;
 import bedmark.screen.Navigator;
 import bedmark.screen.Preferences;
 import bedmark.screen.SidedScreen;
 import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.ChoiceRow;
 import bedmark.screen.part.FootBar;
+import bedmark.screen.part.Labels;
 import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.Weight;
 import bedmark.screen.round.RoundModel;
 import bedmark.screen.round.Ticks;
+import bedmark.screen.settings.SettingsModel;
 import bedmark.screen.theme.Icon;
 import bedmark.survey.Round;
 import bedmark.wording.Wording;
@@ -19,6 +23,7 @@ import bedmark.words.Words;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Stream;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ProgressBar;
@@ -48,8 +53,12 @@ public final class StartView extends SidedScreen {
         this.model = model;
         this.navigator = navigator;
         this.wording = workplace.wording();
-        frame(Heads.head(workplace, listening, wording.text("screen.name"), wording.text("screen.start.title")),
-                footBar());
+        ActionButton settings = ActionButton.with(Icon.SETTINGS, ContentDisplay.LEFT, Weight.PLAIN,
+                wording.text("settings.title"), navigator::toSettings);
+        settings.setId("to-settings");
+        settings.getStyleClass().add("secondary-target");
+        frame(Heads.head(workplace, listening, wording.text("screen.name"), wording.text("screen.start.title"),
+                settings), footBar());
         questions.getStyleClass().add("questions");
         side.getStyleClass().add("safety-card");
         scroll.setFitToWidth(true);
@@ -63,6 +72,7 @@ public final class StartView extends SidedScreen {
     }
 
     private void ask() {
+        model.chooseRound();
         questions.getChildren().clear();
         if (!model.hasPlant() || model.loadingProperty().get() >= 0) {
             offerDemo();
@@ -78,7 +88,7 @@ public final class StartView extends SidedScreen {
         }
         Label name = new Label(wording.text("screen.start.person"));
         name.setLabelFor(person);
-        questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()), progress(),
+        questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()), progress(), limits(),
                 pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
                 pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())));
     }
@@ -94,6 +104,13 @@ public final class StartView extends SidedScreen {
         HBox progress = new HBox(words, ticks);
         progress.getStyleClass().add("progress");
         return progress;
+    }
+
+    /** By which limits is judged: how many the site set, and where all of them are seen. */
+    private Label limits() {
+        SettingsModel settings = new SettingsModel(workplace);
+        return Labels.wrapped("limits", wording.text("settings.limits.short", settings.changedLimits(),
+                settings.limits().size()));
     }
 
     private static HBox pair(VBox left, VBox right) {
@@ -127,38 +144,26 @@ public final class StartView extends SidedScreen {
         }
     }
 
-    private VBox choice(String key, List<ToggleButton> buttons) {
-        HBox row = new HBox();
-        row.getStyleClass().add("row");
-        buttons.forEach(button -> {
-            button.getStyleClass().add("secondary-target");
-            button.setMaxWidth(Double.MAX_VALUE);
-            button.setPrefWidth(100);
-            button.setWrapText(true);
-            HBox.setHgrow(button, Priority.ALWAYS);
-        });
-        row.getChildren().addAll(buttons);
-        VBox box = new VBox(new Label(wording.text(key)), row);
-        box.getStyleClass().add("question");
-        return box;
+    private ChoiceRow choice(String key, List<ChoiceRow.Option> options) {
+        return new ChoiceRow(wording.text(key), options);
     }
 
-    private List<ToggleButton> rounds() {
-        return model.rounds().stream().map(round -> toggle("round-" + round.id(), round.name(),
+    private List<ChoiceRow.Option> rounds() {
+        return model.rounds().stream().map(round -> new ChoiceRow.Option("round-" + round.id(), round.name(),
                 round.equals(model.roundProperty().get()), () -> {
                     model.roundProperty().set(round);
                     ask();
                 })).toList();
     }
 
-    private List<ToggleButton> units() {
-        return List.of(UnitSystem.values()).stream().map(system -> toggle("units-" + system.code(),
+    private List<ChoiceRow.Option> units() {
+        return List.of(UnitSystem.values()).stream().map(system -> new ChoiceRow.Option("units-" + system.code(),
                 wording.text("screen.start.units." + system.code()), workplace.preferences().units() == system,
                 () -> prefer(workplace.preferences().withUnits(system)))).toList();
     }
 
-    private List<ToggleButton> languages() {
-        return Words.LANGUAGES.stream().map(locale -> toggle("language-" + locale.getLanguage(),
+    private List<ChoiceRow.Option> languages() {
+        return Words.LANGUAGES.stream().map(locale -> new ChoiceRow.Option("language-" + locale.getLanguage(),
                 capital(locale.getDisplayLanguage(locale), locale),
                 workplace.preferences().locale().getLanguage().equals(locale.getLanguage()),
                 () -> prefer(workplace.preferences().withLocale(locale)))).toList();
@@ -168,33 +173,23 @@ public final class StartView extends SidedScreen {
         return word.substring(0, 1).toUpperCase(locale) + word.substring(1);
     }
 
-    private List<ToggleButton> lights() {
-        boolean night = workplace.preferences().night();
-        return List.of(toggle("light-day", wording.text("screen.start.light.day"), !night,
-                        () -> prefer(workplace.preferences().withNight(false))),
-                toggle("light-night", wording.text("screen.start.light.night"), night,
-                        () -> prefer(workplace.preferences().withNight(true))));
+    private List<ChoiceRow.Option> lights() {
+        return Stream.of(Lighting.values()).map(one -> new ChoiceRow.Option("light-" + one.code(),
+                wording.text("settings.light." + one.code()), workplace.preferences().lighting() == one,
+                () -> prefer(workplace.preferences().withLighting(one)))).toList();
     }
 
-    private List<ToggleButton> hands() {
+    private List<ChoiceRow.Option> hands() {
         boolean gloves = workplace.preferences().gloves();
-        return List.of(toggle("hand-bare", wording.text("screen.start.hand.bare"), !gloves,
+        return List.of(new ChoiceRow.Option("hand-bare", wording.text("screen.start.hand.bare"), !gloves,
                         () -> prefer(workplace.preferences().withGloves(false))),
-                toggle("hand-gloved", wording.text("screen.start.hand.gloved"), gloves,
+                new ChoiceRow.Option("hand-gloved", wording.text("screen.start.hand.gloved"), gloves,
                         () -> prefer(workplace.preferences().withGloves(true))));
     }
 
     private void prefer(Preferences changed) {
         workplace.preferencesProperty().set(changed);
         ask();
-    }
-
-    private static ToggleButton toggle(String id, String text, boolean selected, Runnable action) {
-        ToggleButton button = new ToggleButton(text);
-        button.setId(id);
-        button.setSelected(selected);
-        button.setOnAction(event -> action.run());
-        return button;
     }
 
     private void safetyCard() {
@@ -208,7 +203,12 @@ public final class StartView extends SidedScreen {
         read.setId("caution-read");
         read.setWrapText(true);
         read.setMaxWidth(Double.MAX_VALUE);
-        read.selectedProperty().bindBidirectional(model.cautionReadProperty());
+        read.setSelected(model.cautionReadProperty().get());
+        // What is read is read: pressing again takes nothing back.
+        read.setOnAction(event -> {
+            read.setSelected(true);
+            model.cautionReadProperty().set(true);
+        });
         side.getChildren().add(read);
     }
 

@@ -9,8 +9,9 @@ import java.util.regex.Pattern;
  *
  * @param dpi  logical pixels to the inch, positive
  * @param hand whose targets are laid out
+ * @param text how large type is set
  */
-public record Density(double dpi, Hand hand) {
+public record Density(double dpi, Hand hand, TextSize text) {
 
     /** A 10.1-inch screen of 1280 × 800. */
     public static final double DEFAULT_DPI = 149;
@@ -18,6 +19,7 @@ public record Density(double dpi, Hand hand) {
     private static final double MM_PER_INCH = 25.4;
     private static final double GAP_MM = 0.85;
     private static final Pattern LENGTH = Pattern.compile("\\b(\\d+(?:\\.\\d+)?)mm\\b");
+    private static final Pattern TYPE = Pattern.compile("(-fx-font-size:\\s*)(\\d+(?:\\.\\d+)?)mm\\b");
     private static final Pattern TARGET = Pattern.compile(
             "\\b(target-height|secondary-height|foot-height|entry-tall|entry-flat)\\b");
 
@@ -26,6 +28,16 @@ public record Density(double dpi, Hand hand) {
             throw new IllegalArgumentException("a screen has a density");
         }
         Objects.requireNonNull(hand);
+        Objects.requireNonNull(text);
+    }
+
+    /** Type of the standard size. */
+    public Density(double dpi, Hand hand) {
+        this(dpi, hand, TextSize.STANDARD);
+    }
+
+    public Density withText(TextSize size) {
+        return new Density(dpi, hand, size);
     }
 
     /** The density of the default screen for a bare hand. */
@@ -81,7 +93,9 @@ public record Density(double dpi, Hand hand) {
                     case "entry-flat" -> rows(3);
                     default -> mm(Hand.BARE.target());
                 })));
-        return LENGTH.matcher(targets).replaceAll(match ->
+        String typed = TYPE.matcher(targets).replaceAll(match -> Matcher.quoteReplacement(match.group(1)
+                + pixels(Math.rint(Double.parseDouble(match.group(2)) * text.scale() * perMm()))));
+        return LENGTH.matcher(typed).replaceAll(match ->
                 Matcher.quoteReplacement(pixels(Math.rint(Double.parseDouble(match.group(1)) * perMm()))));
     }
 

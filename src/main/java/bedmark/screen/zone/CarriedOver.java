@@ -100,6 +100,18 @@ final class CarriedOver {
         }
     }
 
+    /** Whether the reading of that key is a plain one that can be taken over. */
+    static boolean isPlain(String key) {
+        return ALONE.contains(key);
+    }
+
+    /**
+     * The key of the first plain reading that is still to be answered: beside it stands the offer to take over.
+     */
+    static Optional<String> firstOpen(Branch document) {
+        return ALONE.stream().filter(key -> document.at(Survey.READINGS.child(key)).isEmpty()).findFirst();
+    }
+
     /** The marks of a survey. */
     static List<String> marks(Branch document) {
         return items(document.get(MARKS.last())).stream().filter(Node.Text.class::isInstance)

@@ -316,7 +316,11 @@ final class EntryPane extends StackPane {
         // A text of one line ends with Enter; in one of several lines Enter is a line end, and Tab leads on.
         area.addEventFilter(KeyEvent.KEY_PRESSED, event -> {
             boolean on = event.getCode() == KeyCode.TAB || event.getCode() == KeyCode.ENTER && !slot.field().lines();
-            if (on) {
+            if (on && event.getCode() == KeyCode.TAB && !event.isShiftDown() && model.atEnd()) {
+                // Behind the last cell Tab leads out of the form: a keyboard must never be caught in a text.
+                Optional.ofNullable(lookup("#entry-back")).ifPresent(javafx.scene.Node::requestFocus);
+                event.consume();
+            } else if (on) {
                 move(event.isShiftDown());
                 event.consume();
             }

@@ -17,7 +17,16 @@ final class Pull {
     private final double pressedX;
     private final double pressedY;
     private final double grabbed;
-    private boolean moving;
+    private Way way = Way.STILL;
+
+    /** What a finger turned out to mean. */
+    enum Way {
+        STILL,
+        /** The depth follows it. */
+        DEPTH,
+        /** The station follows it along the zone. */
+        ALONG
+    }
 
     private Pull(Grip grip, SideScale scale, Snap snap, double x, double y, double grabbed) {
         this.grip = grip;
@@ -50,10 +59,22 @@ final class Pull {
         return grip;
     }
 
-    /** Whether the finger has moved on far enough to mean it; from then on it always has. */
-    boolean moves(double x, double y, double slack) {
-        moving = moving || Math.hypot(x - pressedX, y - pressedY) > slack;
-        return moving;
+    /**
+     * What the finger means once it has moved on far enough; that is decided once. A depth is pulled by the least
+     * movement up or down, a station moved only by a plain movement along the belt.
+     */
+    Way way(double x, double y, double slack) {
+        if (way == Way.STILL && Math.abs(y - pressedY) > slack) {
+            way = Way.DEPTH;
+        } else if (way == Way.STILL && grip instanceof Grip.OfStation && Math.abs(x - pressedX) > 4 * slack) {
+            way = Way.ALONG;
+        }
+        return way;
+    }
+
+    /** The place under the finger. */
+    Snap.Stepped position(double x) {
+        return snap.position(scale.position(x), scale.length());
     }
 
     /** The depth under the finger, from where on the handle it took hold. */

@@ -14,6 +14,16 @@ public interface PullListener {
      */
     void pulled(Grip grip, Snap.Stepped depth, Phase phase);
 
+    /** A station was moved along the zone; comes again and again as {@link #pulled} does. */
+    void moved(int station, Snap.Stepped position, Phase phase);
+
+    /**
+     * The belt was pulled faster or slower, while that is what the picture is asked for.
+     *
+     * @param forward how far the finger went in the direction of travel since the last time (mm)
+     */
+    void sped(double forward);
+
     /** How far a pull is. */
     enum Phase {
         MOVING,

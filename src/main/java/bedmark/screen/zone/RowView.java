@@ -26,7 +26,6 @@ import javafx.scene.layout.VBox;
 
 /** One row of the form: its name, the boxes of its cells, the mark of its reading, and below it what is to be said. */
 final class RowView extends VBox {
-    private static final String CARRYING = "loadingZoneLength";
     private static final List<String> TONES = List.of("wrong", "questioned", "help");
 
     private final SlotRow row;
@@ -95,7 +94,7 @@ final class RowView extends VBox {
         }
         line.getChildren().addAll(cells);
         quality.ifPresent(line.getChildren()::add);
-        if (row.field().key().equals(CARRYING)) {
+        if (CarriedOver.isPlain(row.field().key())) {
             carry = Optional.of(carryButton());
             carry.ifPresent(line.getChildren()::add);
         }
@@ -160,7 +159,7 @@ final class RowView extends VBox {
             message.getStyleClass().add(said.tone());
         }
         carry.ifPresent(button -> {
-            button.setVisible(model.tables().canCarryOver());
+            button.setVisible(model.tables().carriesOverAt(row.field().key()));
             button.setManaged(button.isVisible());
         });
         lineButtons.ifPresent(LineButtons::update);
@@ -218,7 +217,7 @@ final class RowView extends VBox {
         }
         return slot.equals(model.active()) ? model.inHandProperty().get().unit().orElseThrow()
                 : model.answer(slot).flatMap(SlotWords::quantity).map(Quantity::unit)
-                        .orElse(measured.measure().unit(model.unitsProperty().get()));
+                        .orElse(model.offered(measured.measure()));
     }
 
     private Judgement judged(Slot slot, boolean active) {

@@ -75,9 +75,10 @@ public final class Tables {
         return BedLines.moved(document(), line, position).in(document());
     }
 
-    /** Whether there is geometry of the last survey that can be taken over. */
-    public boolean canCarryOver() {
-        return work.open() && CarriedOver.from(last, document()).isPresent();
+    /** Whether the geometry of the last survey can be taken over, and the offer belongs beside the field of that key. */
+    boolean carriesOverAt(String key) {
+        return work.open() && CarriedOver.firstOpen(document()).filter(key::equals).isPresent()
+                && CarriedOver.from(last, document()).isPresent();
     }
 
     /** Takes the geometry of the last survey over where nothing is answered yet; see {@link CarriedOver}. */

@@ -16,7 +16,7 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
-/** The calculation sheet of a transfer point: every formula with the numbers put in, set for the width that there is. */
+/** The calculation sheet of a transfer point: every formula with its numbers, set for the width that there is. */
 final class WorkingPane extends VBox {
 
     /** @param found what came of the survey as it stands */

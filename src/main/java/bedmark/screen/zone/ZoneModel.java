@@ -5,6 +5,7 @@ import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
 import bedmark.engine.Assessment;
+import bedmark.form.Measure;
 import bedmark.form.SpeedField;
 import bedmark.quantity.BeltState;
 import bedmark.quantity.Quality;
@@ -21,6 +22,7 @@ import java.util.Locale;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.UnaryOperator;
 import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -405,6 +407,17 @@ public final class ZoneModel {
         return unitChoice.of(slot, document(), units.get());
     }
 
+    /** The unit that a number is asked in first: the one that the person likes, where the form has it. */
+    Unit offered(Measure measure) {
+        return unitChoice.offered(measure, units.get());
+    }
+
+    /** Asks first in the unit that the person likes better than a usual one. */
+    void likeUnits(UnaryOperator<Unit> better) {
+        unitChoice.like(better);
+        unitChanged();
+    }
+
     /** The unit in which the active cell is typed; only where it is a number with a unit. */
     private Unit unit() {
         return inHand.get().unit().orElseThrow();
@@ -426,8 +439,9 @@ public final class ZoneModel {
         Branch now = read.answer().map(answer -> Answers.change(document(), active().where(), Optional.of(answer))
                 .in(document())).orElseGet(this::document);
         if (!Objects.equals(survey.get(), now)) {
-            survey.set(now);
+            // Who draws the survey looks at what it comes to as well.
             outcome.set(judge(now));
+            survey.set(now);
         }
     }
 

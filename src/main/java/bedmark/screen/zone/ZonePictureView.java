@@ -34,6 +34,9 @@ public final class ZonePictureView extends Region {
     private Snap snap = Snap.METRIC;
     private Optional<ZonePicture> picture = Optional.empty();
     private Optional<Pull> pull = Optional.empty();
+    private boolean ofSpeed;
+    private double spedFrom;
+    private double corner;
 
     public ZonePictureView(ZoneSketch first, Density density, PullListener listener) {
         this.sketch = first;
@@ -57,6 +60,20 @@ public final class ZonePictureView extends Region {
         requestLayout();
     }
 
+    /** Whether a finger pulls the belt rather than the bed. */
+    public void pullsSpeed(boolean speed) {
+        ofSpeed = speed;
+    }
+
+    /** Keeps the drawing clear of what stands over its upper right corner. */
+    public void keepCorner(double height) {
+        if (corner != height) {
+            corner = height;
+            picture = Optional.empty();
+            requestLayout();
+        }
+    }
+
     /** The picture as it is laid out now; nothing before the first layout. */
     public Optional<ZonePicture> picture() {
         return picture;
@@ -64,6 +81,11 @@ public final class ZonePictureView extends Region {
 
     private void press(MouseEvent event) {
         if (event.getButton() != MouseButton.PRIMARY) {
+            return;
+        }
+        event.consume();
+        if (ofSpeed) {
+            spedFrom = event.getX();
             return;
         }
         pull = picture.flatMap(laid -> Pull.at(event.getX(), event.getY(), laid, sketch, snap));
@@ -74,21 +96,33 @@ public final class ZonePictureView extends Region {
                 listener.pulled(grip, pull.orElseThrow().depth(event.getY()), PullListener.Phase.MOVING);
             }
         });
-        event.consume();
     }
 
     private void drag(MouseEvent event) {
-        pull.filter(held -> held.moves(event.getX(), event.getY(), density.mm(SLACK_MM))).ifPresent(held ->
-                listener.pulled(held.grip(), held.depth(event.getY()), PullListener.Phase.MOVING));
+        if (ofSpeed) {
+            listener.sped((event.getX() - spedFrom) / density.perMm());
+            spedFrom = event.getX();
+        }
+        pull.ifPresent(held -> tell(held, event, PullListener.Phase.MOVING));
         event.consume();
+    }
+
+    private void tell(Pull held, MouseEvent event, PullListener.Phase phase) {
+        switch (held.way(event.getX(), event.getY(), density.mm(SLACK_MM))) {
+            case DEPTH -> listener.pulled(held.grip(), held.depth(event.getY()), phase);
+            case ALONG -> listener.moved(((Grip.OfStation) held.grip()).index(), held.position(event.getX()), phase);
+            case STILL -> {
+                if (held.grip() instanceof Grip.AtPlace) {
+                    listener.pulled(held.grip(), held.depth(event.getY()), phase);
+                }
+            }
+        }
     }
 
     private void release(MouseEvent event) {
         Optional<Pull> ended = pull;
         pull = Optional.empty();
-        ended.filter(held -> held.moves(event.getX(), event.getY(), density.mm(SLACK_MM))
-                || held.grip() instanceof Grip.AtPlace).ifPresent(held ->
-                listener.pulled(held.grip(), held.depth(event.getY()), PullListener.Phase.RELEASED));
+        ended.ifPresent(held -> tell(held, event, PullListener.Phase.RELEASED));
         picture = Optional.empty();
         requestLayout();
         event.consume();
@@ -105,7 +139,7 @@ public final class ZonePictureView extends Region {
         canvas.setWidth(width);
         canvas.setHeight(height);
         if (picture.isEmpty() || resized) {
-            picture = Optional.of(ZonePicture.of(sketch, new Sheet(width, height, density.perMm()), fonts));
+            picture = Optional.of(ZonePicture.of(sketch, new Sheet(width, height, corner, density.perMm()), fonts));
         }
         canvas.getGraphicsContext2D().clearRect(0, 0, width, height);
         new MarkPainter(canvas.getGraphicsContext2D(), inks::of, fonts).paint(picture.orElseThrow().drawing());

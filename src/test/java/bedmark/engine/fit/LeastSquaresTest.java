@@ -95,6 +95,17 @@ class LeastSquaresTest {
         }
     }
 
+    /** With a freedom of 2 it is four times 1. */
+    @Test
+    void morePairsMayContradictLess() {
+        for (double residual : new double[] {4.9, 5.1}) {
+            double off = Math.sqrt(residual) * 10;
+            List<Row> rows = List.of(new Row(0.3, 0, 600 + off, 10), new Row(0.3, 0, 600 - off, 10),
+                    new Row(0.3, 0, 600, 10));
+            assertEquals(residual < 5, SiteFit.of(pairs(rows)) instanceof Fitted, "residual " + residual);
+        }
+    }
+
     @Test
     void aRefusalTellsItsNumbers() {
         assertEquals(List.of("1", "2"), unfit(List.of(new Row(0.3, 0, 600, 10))).arguments());

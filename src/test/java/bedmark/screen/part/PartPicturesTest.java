@@ -59,6 +59,14 @@ class PartPicturesTest {
         @Override
         public void pulled(Grip grip, Snap.Stepped depth, Phase phase) {
         }
+
+        @Override
+        public void moved(int station, Snap.Stepped position, Phase phase) {
+        }
+
+        @Override
+        public void sped(double forward) {
+        }
     };
 
     private static NumericPad pad(PadSetup setup, String text, PadKey... keys) {
@@ -88,7 +96,7 @@ class PartPicturesTest {
     private static VBox result(double pictureHeight) {
         ZonePictureView view = new ZonePictureView(Sketches.gravel(), Density.standard(), NOBODY);
         view.setPrefHeight(pictureHeight);
-        VerdictBlock verdict = new VerdictBlock(Optional.of(new ActionButton(Weight.PLAIN, "Show the working",
+        VerdictBlock verdict = new VerdictBlock(List.of(new ActionButton(Weight.PLAIN, "Show the working",
                 () -> { })));
         verdict.show(Samples.OVERLOADED);
         VBox pane = new VBox(view, verdict);
@@ -167,7 +175,7 @@ class PartPicturesTest {
         speed.ghostProperty().set("was 1.62");
         ReadingRow above = new ReadingRow("Belt speed, by tachometer", ReadingRow.Lead.ABOVE, speed,
                 Optional.empty());
-        VerdictBlock verdict = new VerdictBlock(Optional.of(new ActionButton(Weight.PLAIN, "Go there", () -> { })));
+        VerdictBlock verdict = new VerdictBlock(List.of(new ActionButton(Weight.PLAIN, "Go there", () -> { })));
         verdict.show(Samples.INCOMPLETE);
         ToggleButton one = new ToggleButton("vertical");
         ToggleButton two = new ToggleButton("oblique");

@@ -12,7 +12,6 @@ import bedmark.screen.theme.Light;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalInt;
 import javafx.css.PseudoClass;
 import javafx.scene.Node;
@@ -82,7 +81,7 @@ class PartsTest {
     @Test
     void verdictSaysEverythingInWordsToo() throws Exception {
         Glass.on(() -> {
-            VerdictBlock block = new VerdictBlock(Optional.empty());
+            VerdictBlock block = new VerdictBlock(List.of());
             block.show(Samples.OVERLOADED);
             assertTrue(block.getAccessibleText().startsWith("overloaded. Overloaded: the bed"));
             block.show(Samples.INCOMPLETE);

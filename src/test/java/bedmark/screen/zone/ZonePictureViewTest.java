@@ -40,6 +40,16 @@ class ZonePictureViewTest {
         public void pulled(Grip grip, Snap.Stepped depth, Phase phase) {
             heard.add(grip + " " + depth.steps() + " " + phase);
         }
+
+        @Override
+        public void moved(int station, Snap.Stepped position, Phase phase) {
+            heard.add("moved " + station + " to " + position.steps() + " " + phase);
+        }
+
+        @Override
+        public void sped(double forward) {
+            heard.add("sped " + Math.round(forward));
+        }
     };
 
     private void withView(ZoneSketch sketch, Snap snap, Consumer<ZonePictureView> work)
@@ -92,6 +102,45 @@ class ZonePictureViewTest {
         });
         String place = "AtPlace[position=Stepped[steps=61, step=0.05]] ";
         assertEquals(List.of(place + "20 MOVING", place + "31 MOVING", place + "32 RELEASED"), heard);
+    }
+
+    @Test
+    void plainMovementAlongTheBeltMovesAStation() throws Exception {
+        withView(Sketches.gravel(), Snap.METRIC, view -> {
+            SideScale scale = view.picture().orElseThrow().scale();
+            Handle handle = view.picture().orElseThrow().handles().get(1);
+            mouse(view, MouseEvent.MOUSE_PRESSED, handle.x(), handle.y());
+            mouse(view, MouseEvent.MOUSE_DRAGGED, handle.x() + 10, handle.y() + 2);
+            mouse(view, MouseEvent.MOUSE_DRAGGED, scale.x(3.01), handle.y() + 3);
+            mouse(view, MouseEvent.MOUSE_RELEASED, scale.x(3.01), handle.y() + 40);
+        });
+        assertEquals(List.of("touched 1", "moved 1 to 60 MOVING", "moved 1 to 60 RELEASED"), heard);
+    }
+
+    @Test
+    void depthThatDriftsAlongTheBeltStaysADepth() throws Exception {
+        withView(Sketches.gravel(), Snap.METRIC, view -> {
+            SideScale scale = view.picture().orElseThrow().scale();
+            Handle handle = view.picture().orElseThrow().handles().get(1);
+            mouse(view, MouseEvent.MOUSE_PRESSED, handle.x(), handle.y());
+            mouse(view, MouseEvent.MOUSE_DRAGGED, handle.x() + 8, handle.y() + 8);
+            mouse(view, MouseEvent.MOUSE_RELEASED, handle.x() + 90, scale.y(0.1));
+        });
+        assertEquals(List.of("touched 1", "OfStation[index=1] 20 RELEASED"),
+                List.of(heard.get(0), heard.get(heard.size() - 1)));
+    }
+
+    @Test
+    void fingerPullsTheBeltWhileSpeedIsAskedFor() throws Exception {
+        withView(Sketches.gravel(), Snap.METRIC, view -> {
+            Handle handle = view.picture().orElseThrow().handles().get(1);
+            view.pullsSpeed(true);
+            mouse(view, MouseEvent.MOUSE_PRESSED, handle.x(), handle.y());
+            mouse(view, MouseEvent.MOUSE_DRAGGED, handle.x() + 5 * Density.standard().perMm(), handle.y() + 50);
+            mouse(view, MouseEvent.MOUSE_DRAGGED, handle.x() + 3 * Density.standard().perMm(), handle.y() + 50);
+            mouse(view, MouseEvent.MOUSE_RELEASED, handle.x(), handle.y());
+        });
+        assertEquals(List.of("sped 5", "sped -2"), heard);
     }
 
     @Test

@@ -29,6 +29,14 @@ class ZonePicturesTest {
         @Override
         public void pulled(Grip grip, Snap.Stepped depth, Phase phase) {
         }
+
+        @Override
+        public void moved(int station, Snap.Stepped position, Phase phase) {
+        }
+
+        @Override
+        public void sped(double forward) {
+        }
     };
 
     private static Map<String, ZoneSketch> zones() {

@@ -1,0 +1,35 @@
+package bedmark.screen;
+
+import java.io.File;
+import java.nio.file.Path;
+import java.util.Optional;
+import javafx.stage.DirectoryChooser;
+import javafx.stage.FileChooser;
+import javafx.stage.Stage;
+
+/** Asks by the dialogs of the machine, over one window. */
+final class StageChoice implements FolderChoice {
+    private final Stage stage;
+
+    StageChoice(Stage stage) {
+        this.stage = stage;
+    }
+
+    @Override
+    public Optional<Path> choose(String title, Optional<Path> start) {
+        DirectoryChooser chooser = new DirectoryChooser();
+        chooser.setTitle(title);
+        start.map(Path::toFile).filter(File::isDirectory).ifPresent(chooser::setInitialDirectory);
+        return Optional.ofNullable(chooser.showDialog(stage)).map(File::toPath);
+    }
+
+    @Override
+    public Optional<Path> choosePhoto(String title, Optional<Path> start) {
+        FileChooser chooser = new FileChooser();
+        chooser.setTitle(title);
+        chooser.getExtensionFilters().add(new FileChooser.ExtensionFilter("JPEG, PNG", "*.jpg", "*.jpeg", "*.png",
+                "*.JPG", "*.JPEG", "*.PNG"));
+        start.map(Path::toFile).filter(File::isDirectory).ifPresent(chooser::setInitialDirectory);
+        return Optional.ofNullable(chooser.showOpenDialog(stage)).map(File::toPath);
+    }
+}

@@ -1,0 +1,53 @@
+package bedmark.screen.notes;
+
+import bedmark.photo.Orientation;
+import bedmark.photo.PhotoFacts;
+import java.io.IOException;
+import java.io.InputStream;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Optional;
+import javafx.scene.image.Image;
+import javafx.scene.image.ImageView;
+
+/**
+ * A small picture of a photo, decoded no larger than it is shown, with how it is to be turned.
+ *
+ * @param orientation as the camera was held
+ */
+record Thumbnail(Image image, Orientation orientation) {
+
+    /** The picture as it was seen, no larger than a box (px). */
+    ImageView upright(double width, double height) {
+        boolean lying = orientation.degrees() % 180 != 0;
+        ImageView view = new ImageView(image);
+        view.setPreserveRatio(true);
+        view.setSmooth(true);
+        view.setFitWidth(lying ? height : width);
+        view.setFitHeight(lying ? width : height);
+        view.setRotate(orientation.degrees());
+        view.setScaleX(orientation.mirrored() ? -1 : 1);
+        return view;
+    }
+
+    /**
+     * Decodes a photo; takes time and is done beside the screen. Nothing where it is damaged, or so large that
+     * decoding it would take the memory that the survey needs.
+     *
+     * @param side the longer side of the small picture (px)
+     */
+    static Optional<Thumbnail> of(Path file, double side) {
+        try {
+            if (PhotoFacts.doubt(file).isPresent()) {
+                return Optional.empty();
+            }
+            try (InputStream in = Files.newInputStream(file)) {
+                Image image = new Image(in, side, side, true, true);
+                return image.isError() || image.getWidth() < 1 ? Optional.empty()
+                        : Optional.of(new Thumbnail(image, PhotoFacts.of(file).orientation()));
+            }
+        } catch (IOException e) {
+            return Optional.empty();
+        }
+    }
+}

@@ -1,0 +1,178 @@
+package bedmark.report;
+
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.engine.Result;
+import bedmark.journal.Progress;
+import bedmark.office.OfficeStore;
+import bedmark.office.Place;
+import bedmark.quantity.UnitSystem;
+import bedmark.report.paper.PaperSize;
+import bedmark.wording.Telling;
+import bedmark.wording.Told;
+import bedmark.wording.Wording;
+import bedmark.words.Words;
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.regex.Pattern;
+import java.util.stream.IntStream;
+import org.apache.pdfbox.Loader;
+import org.apache.pdfbox.pdmodel.PDDocument;
+import org.apache.pdfbox.text.PDFTextStripper;
+import org.junit.jupiter.api.AfterAll;
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+class PdfReportTest {
+    @TempDir
+    static Path folder;
+    private static OfficeStore store;
+    private static ReportContent content;
+    private static byte[] english;
+    private static byte[] spanish;
+
+    @BeforeAll
+    static void write() {
+        store = Reports.demo(folder);
+        content = Reports.content(store);
+        english = Reports.pdf(content, options(Locale.ENGLISH, UnitSystem.METRIC, PaperSize.A4));
+        spanish = Reports.pdf(content, options(Reports.SPANISH, UnitSystem.US, PaperSize.LETTER));
+    }
+
+    @AfterAll
+    static void close() {
+        store.close();
+    }
+
+    private static ReportOptions options(Locale language, UnitSystem units, PaperSize paper) {
+        return Reports.options(language, units, paper, Reports.photos(store));
+    }
+
+    /** The text of each page, spaces of all kinds as one. */
+    private static List<String> pages(byte[] pdf) throws IOException {
+        try (PDDocument document = Loader.loadPDF(pdf)) {
+            List<String> pages = new ArrayList<>();
+            for (int i = 1; i <= document.getNumberOfPages(); i++) {
+                PDFTextStripper stripper = new PDFTextStripper();
+                stripper.setStartPage(i);
+                stripper.setEndPage(i);
+                pages.add(plain(stripper.getText(document)));
+            }
+            return pages;
+        }
+    }
+
+    private static String plain(String text) {
+        return text.replaceAll("[\\s\\u00A0]+", " ").strip();
+    }
+
+    @Test
+    void everyZoneStandsInItWithItsNumbers() throws IOException {
+        check(english, new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC), "Working of ");
+        check(spanish, new Wording(new Words(Reports.SPANISH), UnitSystem.US), "Cálculo de ");
+    }
+
+    private static void check(byte[] pdf, Wording wording, String working) throws IOException {
+        List<String> pages = pages(pdf);
+        assertEquals(24, content.zones().size());
+        for (ReportZone zone : content.zones()) {
+            Examined examined = zone.examined().orElseThrow();
+            List<String> own = pages.stream().filter(page -> page.startsWith(working + zone.tag())).toList();
+            assertEquals(1, own.size(), zone.tag());
+            double drag = examined.assessment().get(Result.SKIRT_DRAG).orElseThrow().value();
+            BigDecimal digits = new BigDecimal(drag).round(new MathContext(4, RoundingMode.HALF_EVEN))
+                    .stripTrailingZeros();
+            String newtons = "F = Fm \\+ Fs" + ".* = " + Pattern.quote(plain(wording.format().exact(
+                    digits.scale() < 0 ? digits.setScale(0) : digits))) + " N.*";
+            assertTrue(own.get(0).contains(examined.transfer().from().orElse("")), zone.tag());
+            assertTrue(own.get(0).matches(".*" + newtons), newtons);
+        }
+        for (ReportZone zone : content.at(Place.OVERLOADED)) {
+            Told told = new Telling(wording, zone.examined().orElseThrow().form())
+                    .tell(zone.examined().orElseThrow().assessment());
+            String page = pages.stream().filter(text -> text.contains("· " + zone.tag())).findFirst().orElseThrow();
+            told.figures().forEach(figure -> assertTrue(page.contains(plain(figure.number() + " " + figure.rest())),
+                    figure + " of " + zone.tag()));
+            assertTrue(page.contains(plain(told.sentence())) || page.contains(plain(told.sentence())
+                    .substring(0, 40)), told.sentence());
+        }
+    }
+
+    @Test
+    void theWorkingOfAZoneTakesOnePage() throws IOException {
+        for (byte[] pdf : List.of(english, spanish)) {
+            List<String> pages = pages(pdf);
+            int first = IntStream.range(0, pages.size()).filter(i -> pages.get(i).startsWith("Working of")
+                    || pages.get(i).startsWith("Cálculo de")).findFirst().orElseThrow();
+            assertEquals(content.examined().size(), pages.size() - first);
+        }
+    }
+
+    @Test
+    void pagesAreNumbered() throws IOException {
+        List<String> pages = pages(english);
+        for (int i = 0; i < pages.size(); i++) {
+            assertTrue(pages.get(i).endsWith("Page " + (i + 1) + " of " + pages.size()), pages.get(i));
+        }
+    }
+
+    @Test
+    void whatWasNotInspectedIsNamedWithItsReason() throws IOException {
+        String text = String.join("\n", pages(english));
+        assertTrue(content.at(Place.NOT_INSPECTED).size() > 2);
+        assertTrue(text.contains("Not accessible: walkway buried under chips"));
+    }
+
+    @Test
+    void theCautionAndTheSourcesStandInIt() throws IOException {
+        String text = String.join("\n", pages(english));
+        assertTrue(text.contains("A running belt kills."));
+        assertTrue(text.contains("JCGM 100"));
+        assertTrue(text.contains("not a design or a licensed engineer's sign-off"));
+    }
+
+    @Test
+    void theSameReportIsTheSameBytes() {
+        assertArrayEquals(english, Reports.pdf(content, options(Locale.ENGLISH, UnitSystem.METRIC, PaperSize.A4)));
+    }
+
+    @Test
+    void aReportOfNothingSaysSo() throws IOException {
+        ReportContent nothing = new ReportContent(Reports.AT, List.of(), List.of());
+        String text = String.join("\n", pages(Reports.pdf(nothing, Reports.options(Locale.ENGLISH, UnitSystem.METRIC,
+                PaperSize.A4, ReportPhotos.NONE))));
+        assertTrue(text.contains("nothing surveyed yet"));
+        assertTrue(text.contains("No loading zone of 0 is overloaded."));
+        assertFalse(text.contains("NaN"));
+    }
+
+    @Test
+    void aStoppedReportIsNotWritten() throws IOException {
+        ReportOptions stopped = new ReportOptions(new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC),
+                PaperSize.A4, ReportPhotos.NONE, "Bedmark", new Progress() {
+                    @Override
+                    public void at(long done, long total) {
+                        assertTrue(done <= total);
+                    }
+
+                    @Override
+                    public boolean cancelled() {
+                        return true;
+                    }
+                });
+        ByteArrayOutputStream out = new ByteArrayOutputStream();
+        assertFalse(new PdfReport(content, stopped).write(out));
+        assertEquals(0, out.size());
+    }
+}

@@ -100,15 +100,17 @@ final class WorstPages {
         Lettering soft = Lettering.plain(9.5).soft();
         String who = words.examined(zone) + examined.survey().inspector().map(name -> " · " + name).orElse("");
         double baseline = flow.y() + tag.rise();
+        String by = flow.fitting(who, soft, flow.width() / 3);
+        double room = flow.width() - flow.measured(by, soft) - 12;
+        String name = flow.fitting(number + " · " + zone.tag(), tag, room);
+        String way = flow.fitting(zone.way() + examined.assessor().material(examined.survey())
+                .map(material -> " · " + material.name()).orElse(""), soft, room - flow.measured(name, tag) - 8);
         flow.booklet().tags().within("H3", () -> {
-            String name = number + " · " + zone.tag();
             flow.leaf().write(name, tag, flow.left(), baseline);
-            flow.leaf().write(" " + zone.way() + examined.assessor().material(examined.survey())
-                            .map(material -> " · " + material.name()).orElse(""), soft,
-                    flow.left() + flow.measured(name, tag) + 4, baseline);
+            flow.leaf().write(" " + way, soft, flow.left() + flow.measured(name, tag) + 4, baseline);
         });
-        flow.booklet().tags().within("P", () -> flow.leaf().write(who, soft,
-                flow.left() + flow.width() - flow.measured(who, soft), baseline));
+        flow.booklet().tags().within("P", () -> flow.leaf().write(by, soft,
+                flow.left() + flow.width() - flow.measured(by, soft), baseline));
         flow.down(tag.leading() + 3);
     }
 

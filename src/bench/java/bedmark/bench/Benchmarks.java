@@ -12,11 +12,13 @@ public final class Benchmarks {
                     new AssessmentSuite(),
                     new ParallelSuite(),
                     new GrowthSuite(),
+                    new ScreenSuite(),
                     new SaveSuite(),
                     new ReportSuite(),
                     new StartSuite(),
                     new ExportSuite(),
-                    new WindowSuite());
+                    new WindowSuite(),
+                    new OfficeSuite());
 
     private Benchmarks() {
     }

@@ -40,6 +40,7 @@ public final class StartProbe {
         }
         Clock clock = Clock.systemUTC();
         Path folder = Path.of(arguments[1]);
+        BedmarkApp.prepare();
         try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
             BedmarkApp.open(store, clock, Optional.empty(), false);
         }

@@ -10,20 +10,26 @@ import picocli.CommandLine.Option;
 
 /** The office store that a command works on, and who works. */
 final class OfficeDesk {
-    @Option(names = "--store", paramLabel = "DIR",
-            description = "The office's folder, made when it is not there (default: .bedmark-office in your home).")
-    private Path store;
+    @Option(names = "--store", paramLabel = "DIR|URL",
+            description = {"The office's folder, made when it is not there (default: .bedmark-office in your home),",
+                "or jdbc:postgresql:… for an office that several desks share."})
+    private String store;
+
+    @Option(names = "--desk", paramLabel = "DIR",
+            description = "This desk's own folder where the store is a server (default: .bedmark-office in your home).")
+    private Path own;
 
     @Option(names = "--person", paramLabel = "NAME",
             description = "Who does this, for the office's records (default: your login name).")
     private String person;
 
     OfficeStore open(Surroundings surroundings, ProgressLine progress) {
-        return OfficeStore.open(folder(), OfficeOptions.of(surroundings.clock()).withProgress(progress::at));
-    }
-
-    private Path folder() {
-        return store == null ? Path.of(System.getProperty("user.home"), ".bedmark-office") : store;
+        OfficeOptions options = OfficeOptions.of(surroundings.clock()).withProgress(progress::at);
+        Path home = Path.of(System.getProperty("user.home"), ".bedmark-office");
+        if (store != null && OfficeStore.isServer(store)) {
+            return OfficeStore.open(store, own == null ? home : own, options);
+        }
+        return OfficeStore.open(store == null ? home : Path.of(store), options);
     }
 
     String person() {

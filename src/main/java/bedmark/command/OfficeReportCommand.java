@@ -97,7 +97,7 @@ final class OfficeReportCommand implements Callable<Integer> {
             ReportContent content = ReportContent.of(store, query, OffsetDateTime.now(surroundings.clock()),
                     progress::at).orElseThrow();
             ReportOptions options = new ReportOptions(new Wording(words, system), size,
-                    (zone, sha256) -> store.photo(zone.copy().digest(), sha256), "Bedmark " + ProgramVersion.number(),
+                    (zone, sha256) -> store.photo(zone, sha256), "Bedmark " + ProgramVersion.number(),
                     progress::at);
             whole(target -> write(kind, content, options, target));
             progress.close();

@@ -39,7 +39,8 @@ final class StoreBackupCommand implements Callable<Integer> {
         StoreOptions options = StoreOptions.of("tablet").withClock(surroundings.clock())
                 .withLevels(new LevelWord()::of).withPassphrase(passphrase.of(folder, surroundings));
         Path made;
-        try (Store store = Store.openExisting(folder, options); ProgressLine progress = new ProgressLine(surroundings)) {
+        try (Store store = Store.openExisting(folder, options);
+             ProgressLine progress = new ProgressLine(surroundings)) {
             made = store.backup(target, "", progress::at);
         }
         surroundings.out().println(surroundings.words().text("store.backed-up", made));

@@ -22,8 +22,8 @@ import picocli.CommandLine.Parameters;
 /** Reads receipts of the office into a store. */
 @Command(name = "receipt", mixinStandardHelpOptions = true,
         description = "Reads the office's receipts: surveys that it has with the same content count as received.",
-        footer = {"", "Exit codes: 0 noted; 1 the office has some surveys with another content; 3 a receipt was refused,",
-            "with the reason in one line."})
+        footer = {"", "Exit codes: 0 noted; 1 the office has some surveys with another content;",
+            "3 a receipt was refused, with the reason in one line."})
 final class StoreReceiptCommand implements Callable<Integer> {
     private final Surroundings surroundings;
 

@@ -15,6 +15,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -32,6 +33,9 @@ final class SupportCommand implements Callable<Integer> {
     @Option(names = "--out", required = true, paramLabel = "FILE", description = "The text file to write.")
     private Path out;
 
+    @Mixin
+    private PassphraseOption passphrase = new PassphraseOption();
+
     SupportCommand(Surroundings surroundings) {
         this.surroundings = surroundings;
     }
@@ -48,7 +52,7 @@ final class SupportCommand implements Callable<Integer> {
         lines.add("memory " + Runtime.getRuntime().maxMemory() + " B");
         StoreCheck check;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
-            check = Store.check(folder, FileLayer.disk(), progress::at);
+            check = Store.check(folder, FileLayer.disk(), passphrase.of(folder, surroundings), progress::at);
         }
         lines.add("free " + Files.getFileStore(folder).getUsableSpace() + " B");
         lines.add(String.format(Locale.ROOT, "segments %d entries %d photos %d torn %d defects %d", check.segments(),

@@ -51,10 +51,10 @@ public final class Departure {
      * @throws Refused {@code survey-unknown}; {@code act-unfit} where one is still open; {@code register-absent}
      */
     public Bundle bundle(List<UUID> ids, String notice) {
-        Entry ready = store.readySince(ids).orElseThrow(() ->
+        Entry ready = store.chronicle().readySince(ids).orElseThrow(() ->
                 new Refused(Defect.in("", "act-without-survey", "pack-exported")));
         long asOf = ready.sequence();
-        Branch site = store.register(asOf).orElseThrow(() -> new Refused(Defect.in("", "register-absent")));
+        Branch site = store.chronicle().register(asOf).orElseThrow(() -> new Refused(Defect.in("", "register-absent")));
         List<Survey> surveys = ids.stream().map(id -> finished(id, asOf)).toList();
         Map<String, List<Survey>> rounds = new LinkedHashMap<>();
         site.branches("rounds").stream().flatMap(round -> round.text("id").stream())
@@ -78,7 +78,7 @@ public final class Departure {
     }
 
     private Survey finished(UUID id, long asOf) {
-        SurveyHistory history = store.history(id, asOf).orElseThrow(() ->
+        SurveyHistory history = store.chronicle().history(id, asOf).orElseThrow(() ->
                 new Refused(Defect.in(id.toString(), "survey-unknown")));
         if (history.state() == QueueState.OPEN) {
             throw new Refused(Defect.in(id.toString(), "act-unfit", "pack-exported", "open"));
@@ -91,7 +91,7 @@ public final class Departure {
         List<Survey> all = new ArrayList<>();
         for (SurveyLine line : store.surveys(SurveyQuery.ALL.ofRound(round))) {
             if (line.first() <= asOf) {
-                store.history(line.id(), asOf).ifPresent(history -> all.add(history.survey()));
+                store.chronicle().history(line.id(), asOf).ifPresent(history -> all.add(history.survey()));
             }
         }
         Set<UUID> superseded = Survey.superseded(all);

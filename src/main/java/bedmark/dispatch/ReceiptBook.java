@@ -55,7 +55,7 @@ public final class ReceiptBook {
     /** Whether a receipt of that office was noted before. */
     public boolean trusts(SignedReceipt receipt) {
         Optional<String> key = receipt.document().text("key");
-        return store.receipts().stream().anyMatch(noted -> noted.text("key").isPresent()
+        return store.chronicle().receipts().stream().anyMatch(noted -> noted.text("key").isPresent()
                 && noted.text("key").equals(key));
     }
 

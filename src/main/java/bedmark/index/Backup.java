@@ -60,7 +60,7 @@ final class Backup {
      * @param upTo   the last entry in it
      * @throws Refused {@code backup-vanished}, {@code backup-disk-full}, {@code backup-read-only},
      *                 {@code backup-force-failed}, {@code backup-failed}, {@code backup-source-unreadable},
-     *                 {@code backup-differs}, {@code work-cancelled}; the store is untouched and the earlier backup whole
+     *                 {@code backup-differs}, {@code work-cancelled}; the store is untouched, the earlier backup whole
      */
     BackupList make(Device device, OffsetDateTime at, Journal.Extent extent, long upTo, boolean sealed) {
         List<Source> sources = sources(extent, sealed);

@@ -20,8 +20,8 @@ import java.util.UUID;
 import java.util.regex.Pattern;
 
 /**
- * The folder {@code photos/}: each file untouched, under its own digest, and only ever there as a whole. Where the store
- * has a key, each is sealed with it and bears a further ending; the digest is that of the photo itself.
+ * The folder {@code photos/}: each file untouched, under its own digest, and only ever there as a whole. Where the
+ * store has a key, each is sealed with it and bears a further ending; the digest is that of the photo itself.
  */
 final class PhotoShelf {
     static final String FOLDER = "photos";

@@ -6,6 +6,7 @@ import bedmark.survey.Entry;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.QueueState;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.EnumMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
@@ -33,6 +34,10 @@ final class Queries {
             conditions.add("s.round = ?");
             values.add(round);
         });
+        query.beside().ifPresent(round -> {
+            conditions.add("(s.round is null or s.round <> ?)");
+            values.add(round);
+        });
         query.transfer().ifPresent(transfer -> {
             conditions.add("s.transfer = ?");
             values.add(transfer);
@@ -45,9 +50,19 @@ final class Queries {
         if (query.currentOnly()) {
             conditions.add("not exists (select 1 from survey r where r.supersedes = s.id)");
         }
+        if (query.inspectedOnly()) {
+            conditions.add("s.inspection = ?");
+            values.add(InspectionStatus.INSPECTED.name());
+        }
         String where = conditions.isEmpty() ? "" : " where " + String.join(" and ", conditions);
-        return database.rows("select " + SurveyRow.COLUMNS + " from survey s" + where + " order by s.first_no",
-                SurveyRow::read, values.toArray()).stream().map(SurveyRow::line).toList();
+        String order = " order by s.first_no" + (query.newest().isPresent() ? " desc limit ?" : "");
+        query.newest().ifPresent(values::add);
+        List<SurveyLine> lines = new ArrayList<>(database.rows("select " + SurveyRow.COLUMNS + " from survey s" + where
+                + order, SurveyRow::read, values.toArray()).stream().map(SurveyRow::line).toList());
+        if (query.newest().isPresent()) {
+            Collections.reverse(lines);
+        }
+        return List.copyOf(lines);
     }
 
     Optional<SurveyRow> row(UUID id) {

@@ -109,7 +109,8 @@ final class Mend {
             }
             Frame copied = unproven.get();
             return Optional.of(SegmentWriter.create(files, folder, new SegmentHeader(header.get().form(),
-                    SegmentHeader.Follows.ABANDONED, header.get().journal(), number, copied.sequence(), copied.previous()), copied));
+                    SegmentHeader.Follows.ABANDONED, header.get().journal(), number, copied.sequence(),
+                    copied.previous()), copied));
         } catch (IOException e) {
             // What is read stays readable; the next entry begins a segment of its own, and says so if it can't.
             return Optional.empty();
@@ -131,7 +132,7 @@ final class Mend {
     }
 
     private void copy(Found.Bad torn, Path kept) throws IOException {
-        try (FileLayer.Input input = files.read(last.path()); FileLayer.Output output = files.create(kept)) {
+        try (FileLayer.Input input = files.read(last.path()); FileLayer.Output output = files.createPrivate(kept)) {
             long at = torn.offset();
             long end = torn.offset() + torn.length();
             while (at < end) {

@@ -37,8 +37,8 @@ record SegmentHeader(Frame.Form form, Follows follows, UUID journal, int number,
 
     ByteBuffer encode() {
         ByteBuffer bytes = ByteBuffer.allocate(LENGTH);
-        bytes.putLong(MAGIC).putInt(form.ordinal() + 1).putInt(follows.ordinal()).putLong(journal.getMostSignificantBits())
-                .putLong(journal.getLeastSignificantBits()).putInt(number).putLong(first).put(previous.bytes());
+        bytes.putLong(MAGIC).putInt(form.ordinal() + 1).putInt(follows.ordinal())
+                .putLong(journal.getMostSignificantBits()).putLong(journal.getLeastSignificantBits()).putInt(number).putLong(first).put(previous.bytes());
         return bytes.putInt(crc(bytes.array())).flip();
     }
 

@@ -25,7 +25,7 @@ final class SegmentWriter implements Closeable {
     /** Makes a new segment; on failure its file is deleted, as far as that is still possible. */
     static SegmentWriter create(FileLayer files, Path folder, SegmentHeader header) throws IOException {
         Path file = SegmentFile.path(folder, header.number());
-        FileLayer.Output output = files.create(file);
+        FileLayer.Output output = files.createPrivate(file);
         try {
             output.write(header.encode());
             force(output);
@@ -41,7 +41,7 @@ final class SegmentWriter implements Closeable {
     static SegmentWriter create(FileLayer files, Path folder, SegmentHeader header, Frame first) throws IOException {
         Path file = SegmentFile.path(folder, header.number());
         Path part = folder.resolve(file.getFileName() + Journal.PART);
-        FileLayer.Output output = files.create(part);
+        FileLayer.Output output = files.createPrivate(part);
         try {
             output.write(header.encode());
             output.write(first.encode());

@@ -192,7 +192,7 @@ public final class Transcript {
 
         private void begin(SegmentHeader.Follows follows, long first) throws IOException {
             Path file = folder.resolve(SegmentFile.path(folder, number).getFileName() + WAITING);
-            output = Optional.of(files.create(file));
+            output = Optional.of(files.createPrivate(file));
             size = 0;
             put(new SegmentHeader(cover.form(), follows, identity, number++, first, hash).encode());
         }

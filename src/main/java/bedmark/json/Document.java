@@ -6,16 +6,32 @@ import bedmark.document.Pointer;
 import java.util.Comparator;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.Supplier;
 
-/**
- * A document as it was read, with the line and column of every key and item.
- *
- * @param root   the object that the text holds
- * @param places where each value begins in the text
- */
-public record Document(Branch root, Map<Pointer, Place> places) {
-    public Document {
-        places = Map.copyOf(places);
+/** A document as it was read. The line and column of every key and item are found when they are first asked for. */
+public final class Document {
+    private final Branch root;
+    private final Supplier<Map<Pointer, Place>> finding;
+    private final AtomicReference<Map<Pointer, Place>> places = new AtomicReference<>();
+
+    /**
+     * @param root    the object that the text holds
+     * @param finding finds where each value begins in the text; it costs more than reading did, and most documents have
+     *                nothing wrong
+     */
+    Document(Branch root, Supplier<Map<Pointer, Place>> finding) {
+        this.root = root;
+        this.finding = finding;
+    }
+
+    /** A document that has no text of its own. */
+    Document(Branch root) {
+        this(root, Map::of);
+    }
+
+    public Branch root() {
+        return root;
     }
 
     /** A line and a column of a text, each from 1. */
@@ -24,8 +40,9 @@ public record Document(Branch root, Map<Pointer, Place> places) {
 
     /** Where the value at a pointer, or the nearest value around it, begins. */
     public Optional<Place> placeOf(Pointer pointer) {
+        Map<Pointer, Place> known = places.updateAndGet(found -> found == null ? finding.get() : found);
         for (int length = pointer.tokens().size(); length >= 0; length--) {
-            Place place = places.get(new Pointer(pointer.tokens().subList(0, length)));
+            Place place = known.get(new Pointer(pointer.tokens().subList(0, length)));
             if (place != null) {
                 return Optional.of(place);
             }

@@ -76,7 +76,7 @@ public final class FormReader {
      * @throws Refused with the first defect and its pointer within the form
      */
     public static FieldForm read(Branch form) {
-        return read(new Document(form, Map.of()));
+        return read(new Document(form));
     }
 
     private static FieldForm form(Branch root) {

@@ -40,10 +40,13 @@ public final class JsonReader {
     private static final JsonFactory OWN = factory(DEEPEST + 8);
 
     private final JsonParser parser;
+    private final boolean placing;
     private final Map<Pointer, Document.Place> places = new HashMap<>();
 
-    private JsonReader(JsonParser parser) {
+    /** @param placing whether the place of each value is kept */
+    private JsonReader(JsonParser parser, boolean placing) {
         this.parser = parser;
+        this.placing = placing;
     }
 
     /**
@@ -71,14 +74,22 @@ public final class JsonReader {
 
     private static Document read(byte[] bytes, JsonFactory factory) {
         String text = decode(bytes);
+        return new Document(read(text, factory, false).root(), () -> Map.copyOf(read(text, factory, true).reader().places));
+    }
+
+    private record Read(JsonReader reader, Branch root) {
+    }
+
+    private static Read read(String text, JsonFactory factory, boolean placing) {
         try (JsonParser parser = factory.createParser(text)) {
-            return read(new JsonReader(parser));
+            JsonReader reader = new JsonReader(parser, placing);
+            return new Read(reader, read(reader));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
     }
 
-    private static Document read(JsonReader reader) throws IOException {
+    private static Branch read(JsonReader reader) throws IOException {
         try {
             return reader.document();
         } catch (StreamConstraintsException e) {
@@ -99,7 +110,7 @@ public final class JsonReader {
         }
     }
 
-    private Document document() throws IOException {
+    private Branch document() throws IOException {
         JsonToken first = parser.nextToken();
         if (first != JsonToken.START_OBJECT) {
             throw refused("object", "");
@@ -108,12 +119,14 @@ public final class JsonReader {
         if (parser.nextToken() != null) {
             throw refused("trailing", "");
         }
-        return new Document(root, places);
+        return root;
     }
 
     private Node value(JsonToken token, Pointer here) throws IOException {
-        JsonLocation location = parser.currentTokenLocation();
-        places.put(here, new Document.Place(location.getLineNr(), location.getColumnNr()));
+        if (placing) {
+            JsonLocation location = parser.currentTokenLocation();
+            places.put(here, new Document.Place(location.getLineNr(), location.getColumnNr()));
+        }
         return switch (token) {
             case START_OBJECT -> branch(here);
             case START_ARRAY -> series(here);
@@ -133,7 +146,7 @@ public final class JsonReader {
             if (members.containsKey(key)) {
                 throw refused("key-twice", key);
             }
-            members.put(key, value(parser.nextToken(), here.child(key)));
+            members.put(key, value(parser.nextToken(), placing ? here.child(key) : here));
         }
         return new Branch(members);
     }
@@ -141,7 +154,7 @@ public final class JsonReader {
     private Node.Series series(Pointer here) throws IOException {
         List<Node> items = new ArrayList<>();
         for (JsonToken token = parser.nextToken(); token != JsonToken.END_ARRAY; token = parser.nextToken()) {
-            items.add(value(token, here.child(items.size())));
+            items.add(value(token, placing ? here.child(items.size()) : here));
         }
         return new Node.Series(items);
     }
@@ -162,8 +175,13 @@ public final class JsonReader {
 
     /** Escapes can smuggle half a surrogate pair into a text, which no file could then hold. */
     private String wellFormed(String text) {
-        if (!StandardCharsets.UTF_8.newEncoder().canEncode(text)) {
-            throw refused("surrogate", "");
+        for (int i = 0; i < text.length(); i++) {
+            if (Character.isSurrogate(text.charAt(i))) {
+                if (!StandardCharsets.UTF_8.newEncoder().canEncode(text)) {
+                    throw refused("surrogate", "");
+                }
+                return text;
+            }
         }
         return text;
     }

@@ -19,6 +19,7 @@ import bedmark.office.FlatColumn.FlatRow;
 import bedmark.office.trend.ZoneTrend;
 import bedmark.pack.DeviceKey;
 import bedmark.pack.PackReader;
+import bedmark.pack.PackedPhoto;
 import bedmark.pack.ReadPack;
 import bedmark.pack.Receipt;
 import bedmark.pack.ReceiptWriter;
@@ -32,6 +33,7 @@ import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Merge;
 import bedmark.survey.merge.MergedZone;
 import bedmark.survey.merge.ZoneId;
+import java.io.ByteArrayOutputStream;
 import java.io.Closeable;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -61,8 +63,10 @@ import java.util.function.Function;
 public final class OfficeStore implements AutoCloseable {
     private static final String LOCK = "store.lock";
     private static final String PACKS = "packs";
+    private static final String PASSING = "passing";
     private static final String OFFICE = "office.json";
     private static final int JUDGED_AT_ONCE = 500;
+    private static final int PACKS_OPEN = 8;
 
     private final Path folder;
     private final OfficeOptions options;
@@ -72,22 +76,27 @@ public final class OfficeStore implements AutoCloseable {
     private final Device device;
     private final Books books;
     private final Judge judge;
+    /** Packs that were proved, for their photos. */
+    private final Map<String, ReadPack> open = new HashMap<>();
     private Minutes minutes = new Minutes();
     private final AtomicBoolean closed = new AtomicBoolean();
 
-    private OfficeStore(Path folder, OfficeOptions options, Desk desk, Closeable lock, boolean afresh)
-            throws IOException {
+    private OfficeStore(Path folder, Optional<String> url, OfficeOptions options, Desk desk, Closeable lock,
+                        boolean afresh) throws IOException {
         this.folder = folder;
         this.options = options;
         this.desk = desk;
         this.lock = lock;
-        this.shelf = new PackShelf(folder.resolve(PACKS), options.files());
+        this.shelf = new PackShelf(folder.resolve(url.isPresent() ? PASSING : PACKS), options.files(),
+                url.isPresent());
         shelf.open();
         DeviceFile file = new DeviceFile(folder, options.files(), OFFICE);
         Optional<Device> known = file.read();
         this.device = known.isPresent() ? known.get() : file.write(Optional.empty(), options.name());
-        this.books = FolderBooks.open(folder, options, device.id(), new Effects(shelf, options.limits(),
-                this::minutes), afresh);
+        Effects effects = new Effects(shelf, options.limits(), this::minutes);
+        this.books = url.isPresent()
+                ? new ServerBooks(url.get(), options, device.id(), effects, () -> minutes = new Minutes())
+                : FolderBooks.open(folder, options, device.id(), effects, afresh);
         this.judge = new Judge(this::version);
     }
 
@@ -98,26 +107,52 @@ public final class OfficeStore implements AutoCloseable {
      *                 store of a tablet, {@code store-…} where the folder can't be used
      */
     public static OfficeStore open(Path folder, OfficeOptions options) {
-        return open(folder, options, false);
+        return open(folder, Optional.empty(), options, false);
+    }
+
+    /**
+     * Opens the store that several desks share on a database server.
+     *
+     * @param url     {@code jdbc:postgresql:…}
+     * @param own     this desk's own folder: its identity, its key, and packs that pass through
+     * @throws Refused {@code office-database-failed} where the server can't be used, and those of
+     *                 {@link #open(Path, OfficeOptions)} for the folder
+     */
+    public static OfficeStore open(String url, Path own, OfficeOptions options) {
+        if (!OfficeTables.isServer(url)) {
+            throw new IllegalArgumentException("no server");
+        }
+        return open(own, Optional.of(url), options, false);
     }
 
     /** As {@link #open(Path, OfficeOptions)}, with the tables made anew from the journal and the packs. */
     public static OfficeStore rebuild(Path folder, OfficeOptions options) {
-        return open(folder, options, true);
+        return open(folder, Optional.empty(), options, true);
     }
 
-    private static OfficeStore open(Path folder, OfficeOptions options, boolean afresh) {
+    /** Whether a folder holds an office store. */
+    public static boolean isOffice(Path folder) {
+        return FileLayer.disk().exists(folder.resolve(OFFICE));
+    }
+
+    /** Whether a text names a database server rather than a folder. */
+    public static boolean isServer(String text) {
+        return OfficeTables.isServer(text);
+    }
+
+    private static OfficeStore open(Path folder, Optional<String> url, OfficeOptions options, boolean afresh) {
         Path home = folder.toAbsolutePath().normalize();
         Desk desk = new Desk("bedmark-office");
         try {
-            return desk.call(() -> openLocked(home, options, desk, afresh));
+            return desk.call(() -> openLocked(home, url, options, desk, afresh));
         } catch (RuntimeException e) {
             desk.close();
             throw refused(e);
         }
     }
 
-    private static OfficeStore openLocked(Path folder, OfficeOptions options, Desk desk, boolean afresh) {
+    private static OfficeStore openLocked(Path folder, Optional<String> url, OfficeOptions options, Desk desk,
+                                          boolean afresh) {
         FileLayer files = options.files();
         try {
             if (files.exists(folder.resolve(DeviceFile.NAME)) && !files.exists(folder.resolve(OFFICE))) {
@@ -127,7 +162,7 @@ public final class OfficeStore implements AutoCloseable {
             Closeable lock = files.lock(folder.resolve(LOCK))
                     .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
             try {
-                return new OfficeStore(folder, options, desk, lock, afresh);
+                return new OfficeStore(folder, url, options, desk, lock, afresh);
             } catch (IOException | RuntimeException e) {
                 lock.close();
                 throw e;
@@ -212,9 +247,10 @@ public final class OfficeStore implements AutoCloseable {
         Intake intake = Intake.of(pack.bundle(), laid.sha256());
         OfficeDeed deed = new OfficeDeed.PackReceived(laid.sha256(), file.getFileName().toString(), laid.bytes(),
                 fingerprint, document.uuid("id"), document.time("createdAt"), sender.uuid("id"), name);
-        Set<String> before = ask(tables -> Set.copyOf(tables.copiesOf(digests(intake)).keySet()));
+        Set<String> before = ask(tables -> tables.known(digests(intake)));
         Optional<Entry> entry = keep(tables -> tables.hasPack(laid.sha256()), () -> shelf.keep(laid),
                 new Books.Deed(person, deed, Optional.of(intake)));
+        shelf.passed(laid.sha256());
         if (entry.isEmpty()) {
             shelf.drop(laid.part());
             return new Received.AlreadyHere(file, laid.sha256(), shown, fingerprint, receipt(document, intake,
@@ -265,8 +301,8 @@ public final class OfficeStore implements AutoCloseable {
     private List<Clash> clashes(Intake intake) {
         Set<ZoneId> zones = new HashSet<>();
         intake.copies().forEach(row -> zones.add(row.copy().zone()));
-        return ask(tables -> Merge.zones(tables.copies(zones), minutes(tables).setAside()).values().stream()
-                .flatMap(zone -> zone.clashes().stream()).toList());
+        return ask(tables -> Merge.zones(tables.copies(tables.clashing(zones)), minutes(tables).setAside())
+                .values().stream().flatMap(zone -> zone.clashes().stream()).toList());
     }
 
     private static long ahead(Branch bundle, OffsetDateTime now) {
@@ -353,6 +389,8 @@ public final class OfficeStore implements AutoCloseable {
         while (done < total && !progress.cancelled()) {
             progress.at(done, total);
             int judged = ask(tables -> {
+                // What is judged must not change before it is written down.
+                tables.alone();
                 List<ZoneId> zones = tables.waiting(JUDGED_AT_ONCE);
                 Map<ZoneId, Optional<Verdict>> verdicts = new LinkedHashMap<>();
                 latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
@@ -425,6 +463,37 @@ public final class OfficeStore implements AutoCloseable {
                 minutes(tables).setAside()).results(), copy -> copy.origin().register()));
     }
 
+    /** The bytes of a photo of a survey; nothing where no pack holds it. */
+    public Optional<byte[]> photo(JudgedZone zone, String sha256) {
+        return desk.call(() -> books.ask(() -> books.tables().packOf(zone.copy().digest())).flatMap(pack ->
+                photo(pack, sha256)));
+    }
+
+    private Optional<byte[]> photo(String pack, String sha256) {
+        if (!shelf.has(pack)) {
+            books.ask(() -> books.tables().pack(pack)).ifPresent(content -> shelf.lay(pack, content));
+        }
+        if (!open.containsKey(pack)) {
+            if (open.size() > PACKS_OPEN) {
+                open.clear();
+            }
+            open.put(pack, new PackReader(options.limits(), BundleReader::read).open(shelf.file(pack),
+                    Progress.NONE));
+        }
+        ReadPack read = open.get(pack);
+        Optional<PackedPhoto> found = read.photos().stream().filter(one -> one.sha256().equals(sha256)).findFirst();
+        if (found.isEmpty()) {
+            return Optional.empty();
+        }
+        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+        try {
+            read.copy(found.get(), bytes);
+            return Optional.of(bytes.toByteArray());
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("store", e, options.files(), folder), e);
+        }
+    }
+
     /** A zone over time. */
     public ZoneTrend trend(ZoneId zone) {
         List<JudgedZone> counted = history(zone);
@@ -479,17 +548,6 @@ public final class OfficeStore implements AutoCloseable {
         return ask(tables -> documents(tables, digests));
     }
 
-    /**
-     * A photo of a survey, from the pack that the survey came in.
-     *
-     * @param content digest of the survey's content
-     * @param sha256  of the photo, as the survey names it
-     * @return nothing where the pack is not here, or can't be read any more
-     */
-    public Optional<byte[]> photo(String content, String sha256) {
-        return ask(tables -> tables.packOf(content)).flatMap(pack -> shelf.photo(pack, sha256, options.limits()));
-    }
-
     /** The zone with that id, or with that tag where there is one alone. */
     public Optional<ZoneId> zone(String named) {
         List<ZoneRow> rows = ask(OfficeTables::zones);
@@ -521,6 +579,11 @@ public final class OfficeStore implements AutoCloseable {
 
     public List<OfficeDeed.ActionSet> actions() {
         return ask(tables -> minutes(tables).actions());
+    }
+
+    /** This office's, or this desk's own folder. */
+    public Path folder() {
+        return folder;
     }
 
     public Device device() {

@@ -5,17 +5,11 @@ import bedmark.document.Refused;
 import bedmark.journal.Digest;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
-import bedmark.journal.Progress;
-import bedmark.json.BundleReader;
-import bedmark.pack.PackLimits;
-import bedmark.pack.PackReader;
-import bedmark.pack.PackedPhoto;
-import bedmark.pack.ReadPack;
-import java.io.ByteArrayOutputStream;
 import java.io.FileInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.ByteBuffer;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.util.Optional;
@@ -28,8 +22,11 @@ final class PackShelf {
 
     private final Path folder;
     private final FileLayer files;
+    private final boolean passing;
 
-    PackShelf(Path folder, FileLayer files) {
+    /** @param passing whether packs only pass through here, since the tables hold them */
+    PackShelf(Path folder, FileLayer files, boolean passing) {
+        this.passing = passing;
         this.folder = folder;
         this.files = files;
     }
@@ -42,7 +39,7 @@ final class PackShelf {
     void open() throws IOException {
         files.createFolder(folder);
         for (Path file : files.list(folder)) {
-            if (file.getFileName().toString().endsWith(PART)) {
+            if (passing || file.getFileName().toString().endsWith(PART)) {
                 files.delete(file);
             }
         }
@@ -99,30 +96,12 @@ final class PackShelf {
         }
     }
 
-    /**
-     * A photo of a pack; its digest is proved once more.
-     *
-     * @return nothing where the pack does not hold it, is not here, or is not as it was
-     */
-    Optional<byte[]> photo(String pack, String sha256, PackLimits limits) {
-        if (!has(pack)) {
-            return Optional.empty();
-        }
-        try (ByteArrayOutputStream bytes = new ByteArrayOutputStream()) {
-            ReadPack read = new PackReader(limits, BundleReader::read).open(file(pack), Progress.NONE);
-            Optional<PackedPhoto> photo = read.photos().stream().filter(one -> one.sha256().equals(sha256)).findFirst();
-            if (photo.isEmpty()) {
-                return Optional.empty();
-            }
-            read.copy(photo.get(), bytes);
-            return Optional.of(bytes.toByteArray());
-        } catch (IOException | Refused e) {
-            return Optional.empty();
-        }
-    }
-
     /** Gives a copy its name for good. */
     void keep(Laid laid) {
+        if (!files.exists(laid.part()) && has(laid.sha256())) {
+            // It was kept, and what was to follow is tried once more.
+            return;
+        }
         try {
             files.move(laid.part(), file(laid.sha256()));
             files.forceFolder(folder);
@@ -133,7 +112,27 @@ final class PackShelf {
 
     /** A pack's bytes, where the tables are to hold them because no folder does. */
     Optional<byte[]> forTables(String sha256) {
-        return Optional.empty();
+        try {
+            return passing ? Optional.of(Files.readAllBytes(file(sha256))) : Optional.empty();
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("store", e, files, folder), e);
+        }
+    }
+
+    /** Lays down a pack that only the tables hold, so that it can be read. */
+    void lay(String sha256, byte[] content) {
+        try {
+            Files.write(file(sha256), content);
+        } catch (IOException e) {
+            throw new Refused(Fault.defect("store", e, files, folder), e);
+        }
+    }
+
+    /** Lets a pack go that the tables hold. */
+    void passed(String sha256) {
+        if (passing) {
+            drop(file(sha256));
+        }
     }
 
     /** Lets a copy go that was not taken in; one that can't be deleted goes when the store is opened next. */

@@ -8,6 +8,7 @@ import bedmark.screen.start.UnlockModel;
 import bedmark.screen.start.UnlockView;
 import bedmark.screen.theme.Light;
 import bedmark.screen.theme.Theme;
+import bedmark.screen.theme.Typeface;
 import bedmark.survey.LevelWord;
 import bedmark.vault.Passphrase;
 import bedmark.wording.Wording;
@@ -38,13 +39,14 @@ public final class BedmarkApp extends Application {
      * What the window begins with.
      *
      * @param store   opened already; nothing where it takes a passphrase
+     * @param site    the plant of that store
      * @param folder  the store's
      * @param opening opens it with one
      * @param samples the folder with the demo plant
      * @param load    whether to load it at once
      */
-    private record Launch(Optional<Store> store, Path folder, Function<Passphrase, Store> opening, Clock clock,
-                          Optional<Path> samples, boolean load) {
+    private record Launch(Optional<Store> store, Optional<Site> site, Path folder,
+                          Function<Passphrase, Store> opening, Clock clock, Optional<Path> samples, boolean load) {
     }
 
     /** The options that the app opens a store with. */
@@ -54,12 +56,30 @@ public final class BedmarkApp extends Application {
     }
 
     /**
+     * Starts the toolkit and lets it read the typeface while the caller opens a store, since neither needs the other.
+     * Where there is no display, {@link #open} says so.
+     */
+    public static void prepare() {
+        Thread preparing = new Thread(() -> {
+            try {
+                Platform.startup(Typeface::load);
+            } catch (UnsupportedOperationException e) {
+                // Said again, and told to the person, when the window is to be opened.
+                return;
+            }
+        }, "prepare-toolkit");
+        preparing.setDaemon(true);
+        preparing.start();
+    }
+
+    /**
      * Opens the window and returns when it is closed.
      *
      * @return false where there is no display to open a window on
      */
     public static boolean open(Store store, Clock clock, Optional<Path> samples, boolean load) {
-        return launch(new Launch(Optional.of(store), store.folder(), passphrase -> store, clock, samples, load));
+        return launch(new Launch(Optional.of(store), Workplace.readSite(store), store.folder(), passphrase -> store,
+                clock, samples, load));
     }
 
     /**
@@ -70,7 +90,7 @@ public final class BedmarkApp extends Application {
      */
     public static boolean unlock(Path folder, Function<Passphrase, Store> opening, Clock clock,
                                  Optional<Path> samples) {
-        return launch(new Launch(Optional.empty(), folder, opening, clock, samples, false));
+        return launch(new Launch(Optional.empty(), Optional.empty(), folder, opening, clock, samples, false));
     }
 
     private static boolean launch(Launch begin) {
@@ -87,7 +107,7 @@ public final class BedmarkApp extends Application {
     public void start(Stage stage) {
         Launch given = launch.orElseThrow();
         stage.setTitle("Bedmark");
-        given.store().ifPresentOrElse(store -> work(stage, given, store), () -> ask(stage, given));
+        given.store().ifPresentOrElse(store -> work(stage, given, store, given.site()), () -> ask(stage, given));
         stage.show();
     }
 
@@ -95,16 +115,16 @@ public final class BedmarkApp extends Application {
     private void ask(Stage stage, Launch given) {
         Preferences preferences = new PreferencesFile(given.folder()).read();
         UnlockView view = new UnlockView(new Wording(new Words(preferences.locale()), preferences.units()),
-                new UnlockModel(given.opening(), Platform::runLater), store -> work(stage, given, store));
+                new UnlockModel(given.opening(), Platform::runLater), store -> work(stage, given, store, Workplace.readSite(store)));
         Scene scene = new Scene(view, WIDTH, HEIGHT);
         Theme.apply(scene, preferences.night() ? Light.NIGHT : Light.DAY, Shell.density(preferences));
         stage.setScene(scene);
         view.focus();
     }
 
-    private void work(Stage stage, Launch given, Store store) {
-        Workplace here = new Workplace(store, given.clock(), Platform::runLater,
-                new StageChoice(stage), given.samples());
+    private void work(Stage stage, Launch given, Store store, Optional<Site> site) {
+        Workplace here = new Workplace(store, site, given.clock(), Platform::runLater, new StageChoice(stage),
+                given.samples());
         Shell opened = new Shell(here, WIDTH, HEIGHT);
         workplace = Optional.of(here);
         shell = Optional.of(opened);

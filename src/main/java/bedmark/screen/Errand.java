@@ -12,7 +12,7 @@ import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleDoubleProperty;
 
-/** Work that takes time: done beside the screen, one at a time, with its progress, a way to stop it, and its trouble. */
+/** Work that takes time: done beside the screen, one at a time, with its progress, a way to stop it, its trouble. */
 public final class Errand {
     private final Workplace workplace;
     private final DoubleProperty progress = new SimpleDoubleProperty(-1);

@@ -46,6 +46,12 @@ public final class Workplace implements AutoCloseable {
      * @param samples      the folder with the demo plant, where there is one
      */
     public Workplace(Store store, Clock clock, Executor screen, FolderChoice folderChoice, Optional<Path> samples) {
+        this(store, readSite(store), clock, screen, folderChoice, samples);
+    }
+
+    /** As above, with the plant of the store, which somebody has read already. */
+    Workplace(Store store, Optional<Site> site, Clock clock, Executor screen, FolderChoice folderChoice,
+              Optional<Path> samples) {
         this.store = store;
         this.clock = clock;
         this.screen = screen;
@@ -54,7 +60,7 @@ public final class Workplace implements AutoCloseable {
         this.scribe = new Scribe(store, screen);
         this.preferencesFile = new PreferencesFile(store.folder());
         this.preferences = new SimpleObjectProperty<>(preferencesFile.read());
-        this.site = new ReadOnlyObjectWrapper<>(readSite());
+        this.site = new ReadOnlyObjectWrapper<>(site);
         preferences.addListener((property, before, now) -> {
             preferencesFile.write(now);
             wording.set(wording(now));
@@ -66,7 +72,8 @@ public final class Workplace implements AutoCloseable {
         return new Wording(new Words(preferences.locale()), preferences.units(), preferences.chosenUnits());
     }
 
-    private Optional<Site> readSite() {
+    /** The plant of a store. */
+    static Optional<Site> readSite(Store store) {
         return store.register().map(Site::of);
     }
 
@@ -78,7 +85,7 @@ public final class Workplace implements AutoCloseable {
 
     /** Reads the plant anew, where it may have changed. Runs beside the screen. */
     public void reread() {
-        Optional<Site> read = readSite();
+        Optional<Site> read = readSite(store);
         screen.execute(() -> site.set(read));
     }
 

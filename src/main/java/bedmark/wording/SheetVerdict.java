@@ -82,7 +82,7 @@ final class SheetVerdict {
             parts.add(new SheetPart.Flow(clear));
         }
         assessment.levelAtDesignFeed().ifPresent(level -> parts.add(new SheetPart.Item(
-                wording.text("verdict.at-design-feed", telling.level(level)))));
+                wording.text("working.level-at-design", telling.level(level)))));
         telling.tell(assessment).repeat().map(SheetPart.Item::new).ifPresent(parts::add);
         return parts;
     }

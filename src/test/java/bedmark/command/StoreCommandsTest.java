@@ -168,7 +168,7 @@ class StoreCommandsTest {
         fine("store", "receipt", home.toString(), second.toString());
         try (Store store = Store.open(home, options())) {
             assertEquals((long) surveys.size(), store.counts().get(QueueState.RECEIVED));
-            assertEquals(2, store.receipts().size(), "a receipt that tells nothing new is not noted again");
+            assertEquals(2, store.chronicle().receipts().size(), "a receipt that tells nothing new is not noted again");
         }
         Path foreign = ReceiptWriter.write(Receipt.of(UUID.randomUUID(), OffsetDateTime.now(CLOCK), receipt.office(),
                 receipt.pack(), "11".repeat(32), items), office, temp.resolve("foreign.receipt.json"));

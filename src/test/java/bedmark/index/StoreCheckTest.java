@@ -5,10 +5,12 @@ import static bedmark.index.StoreScript.id;
 import static bedmark.index.StoreScript.options;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
 import bedmark.document.Defect;
+import bedmark.document.Refused;
 import bedmark.journal.Digest;
 import bedmark.journal.Progress;
 import bedmark.journal.QuickLayer;
@@ -71,6 +73,44 @@ class StoreCheckTest {
                 check);
         assertEquals(100, progress.get(progress.size() - 1));
         assertEquals(before, everyFile());
+    }
+
+    @Test
+    void aProofStopsWhereThePersonStopsIt() throws IOException {
+        walked();
+        Map<String, String> before = everyFile();
+        Progress impatient = new Progress() {
+            @Override
+            public void at(long done, long total) {
+                assertTrue(done <= total);
+            }
+
+            @Override
+            public boolean cancelled() {
+                return true;
+            }
+        };
+        assertEquals("work-cancelled", assertThrows(Refused.class, () ->
+                Store.check(folder, new QuickLayer(), impatient)).defect().code());
+        assertEquals(before, everyFile());
+    }
+
+    @Test
+    void aCheckTellsWhenSomethingWasSavedAndBackedUpLast() throws IOException {
+        walked();
+        Path stick = Files.createDirectory(folder.resolve("stick"));
+        try (Store store = Store.open(folder, options().withFiles(new QuickLayer()))) {
+            store.backup(stick, PERSON, Progress.NONE);
+            assertEquals(0, store.facts().notBackedUp());
+            store.append(PERSON, new Act.WalkStarted("round-2"));
+            assertEquals(1, store.facts().notBackedUp());
+        }
+        StoreFacts facts = check().facts();
+        assertEquals(20, facts.last());
+        assertEquals(18, facts.backup().orElseThrow().upTo());
+        assertEquals(1, facts.notBackedUp());
+        assertTrue(facts.savedAt().isPresent());
+        assertTrue(facts.freeBytes() > 0);
     }
 
     @Test

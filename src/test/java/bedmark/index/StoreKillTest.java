@@ -95,8 +95,8 @@ class StoreKillTest {
             run(i, random.nextInt(40), sealed);
         }
         assertTrue(acknowledged.size() > kills, () -> "only " + acknowledged.size() + " were saved");
-        Store.check(folder, FileLayer.disk(), options("", sealed).passphrase(), Progress.NONE).defects().forEach(defect ->
-                assertTrue(defect.code().equals("journal-tail-unread"), defect.toString()));
+        Store.check(folder, FileLayer.disk(), options("", sealed).passphrase(), Progress.NONE).defects().forEach(
+                defect -> assertTrue(defect.code().equals("journal-tail-unread"), defect.toString()));
         Map<Long, String> there = new HashMap<>();
         List<String> notes = new ArrayList<>();
         try (Store store = Store.open(folder, options("tablet", sealed))) {

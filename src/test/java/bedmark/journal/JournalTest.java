@@ -21,6 +21,7 @@ import java.nio.ByteBuffer;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.attribute.PosixFilePermissions;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
@@ -28,6 +29,7 @@ import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.LongStream;
 import java.util.zip.CRC32C;
+import org.junit.jupiter.api.Assumptions;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -55,6 +57,17 @@ class JournalTest {
         Read replayed = new Read();
         open(folder, replayed).close();
         assertEquals(written, replayed.entries);
+    }
+
+    /** Who was trusted, who inspected: that is nobody's business on a machine that others use too. */
+    @Test
+    void onlyTheOwnerMayReadTheJournal() throws IOException {
+        Assumptions.assumeTrue(folder.getFileSystem().supportedFileAttributeViews().contains("posix"),
+                "no POSIX rights here");
+        write(folder, 40);
+        for (SegmentFile segment : SegmentFile.list(FileLayer.disk(), folder)) {
+            assertEquals("rw-------", PosixFilePermissions.toString(Files.getPosixFilePermissions(segment.path())));
+        }
     }
 
     @Test

@@ -17,6 +17,11 @@ public final class QuickLayer extends ForwardingLayer {
     }
 
     @Override
+    public Output createPrivate(Path file) throws IOException {
+        return new QuickOutput(super.createPrivate(file));
+    }
+
+    @Override
     public Output append(Path file) throws IOException {
         return new QuickOutput(super.append(file));
     }

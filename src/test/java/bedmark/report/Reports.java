@@ -44,7 +44,7 @@ final class Reports {
     }
 
     static ReportPhotos photos(OfficeStore store) {
-        return (zone, sha256) -> store.photo(zone.copy().digest(), sha256);
+        return (zone, sha256) -> store.photo(zone, sha256);
     }
 
     static byte[] pdf(ReportContent content, ReportOptions options) {

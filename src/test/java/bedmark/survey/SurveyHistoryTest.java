@@ -52,6 +52,35 @@ class SurveyHistoryTest {
         assertEquals(Optional.of(Node.text("one")), now().changes().get(1).before());
     }
 
+    /** A revision of what a history holds. */
+    private static Act.RevisionOpened revision(SurveyHistory corrected, String why) {
+        Survey old = corrected.survey();
+        UUID id = new UUID(7, old.revision() + 1);
+        return new Act.RevisionOpened(id, old.id(), why, old.document().with("id", id.toString())
+                .with("revision", Node.number(old.revision() + 1L)).with("supersedes", old.id().toString()));
+    }
+
+    private static SurveyHistory after(Act act, String person) {
+        return SurveyHistory.after(Optional.empty(), new Entry(90, TIME.plusDays(1), person, ID, act)).orElseThrow();
+    }
+
+    @Test
+    void aRevisionTellsTheWholeChainOfWhatItCorrects() {
+        open();
+        SurveyHistory second = after(revision(now(), "wrong belt"), "B. Person");
+        Act.RevisionOpened again = revision(second, "wrong seal");
+        SurveyHistory third = after(again, "C. Person");
+        List<Branch> chain = third.survey().document().branches(SurveyHistory.REVISIONS);
+        assertEquals(List.of("1 wrong belt B. Person", "2 wrong seal C. Person"), chain.stream().map(one ->
+                one.number("revision").orElseThrow() + " " + one.text("why").orElseThrow() + " "
+                        + one.text("correctedBy").orElseThrow()).toList());
+        assertEquals(ID.toString(), chain.get(0).text("id").orElseThrow());
+        assertEquals(TIME.plusDays(1), chain.get(1).time("correctedAt").orElseThrow());
+        SurveyHistory takenOver = after(new Act.RevisionOpened(again.survey(), again.supersedes(), again.why(),
+                third.survey().document()), "D. Person");
+        assertEquals(chain, takenOver.survey().document().branches(SurveyHistory.REVISIONS), "told once");
+    }
+
     @Test
     void undoingEverythingGivesTheSurveyAsOpened() {
         Random random = new Random(7);

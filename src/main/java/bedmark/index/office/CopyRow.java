@@ -36,18 +36,17 @@ public record CopyRow(Copy copy, String pack, byte[] content) {
     }
 
     static Copy read(ResultSet row) throws SQLException {
-        return new Copy(row.getString("digest"), row.getObject("id", UUID.class), row.getInt("revision"),
-                Optional.ofNullable(row.getObject("supersedes", UUID.class)), ZoneId.ofKey(row.getString("zone")),
-                row.getString("round"), InspectionStatus.valueOf(row.getString("status")), number(row, "begun"),
-                number(row, "finished"), new Origin(row.getLong("made"), row.getString("register"),
-                row.getString("conveyor")));
+        return new Copy(row.getString(1), row.getObject(2, UUID.class), row.getInt(3),
+                Optional.ofNullable(row.getObject(4, UUID.class)), ZoneId.ofKey(row.getString(5)),
+                row.getString(6), InspectionStatus.valueOf(row.getString(7)), number(row, 8),
+                number(row, 9), new Origin(row.getLong(10), row.getString(11), row.getString(12)));
     }
 
     static Object boxed(OptionalLong value) {
         return value.isPresent() ? (Object) value.getAsLong() : null;
     }
 
-    static OptionalLong number(ResultSet row, String column) throws SQLException {
+    static OptionalLong number(ResultSet row, int column) throws SQLException {
         long value = row.getLong(column);
         return row.wasNull() ? OptionalLong.empty() : OptionalLong.of(value);
     }

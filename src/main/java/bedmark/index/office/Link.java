@@ -15,6 +15,8 @@ import java.util.function.Supplier;
 /** One connection, used by one thread; every failure is an {@link OfficeBroken}. */
 final class Link implements AutoCloseable {
     private static final int FETCH = 10_000;
+    /** How long an answer may take (s). */
+    private static final int ANSWERS_WITHIN = 5;
 
     private final Connection connection;
     private final Map<String, PreparedStatement> statements = new HashMap<>();
@@ -96,6 +98,15 @@ final class Link implements AutoCloseable {
             connection.rollback();
         } catch (SQLException | RuntimeException e) {
             failure.addSuppressed(e);
+        }
+    }
+
+    /** Whether the database still answers. */
+    boolean alive() {
+        try {
+            return connection.isValid(ANSWERS_WITHIN);
+        } catch (SQLException | RuntimeException e) {
+            return false;
         }
     }
 

@@ -62,6 +62,16 @@ public final class OfficeTables implements AutoCloseable {
         return new OfficeTables(OfficeDatabase.open(url), true);
     }
 
+    /** That there is no server to ask just now. */
+    public static OfficeBroken away() {
+        return new OfficeBroken("the server is away");
+    }
+
+    /** Whether the database still answers, so that a failure was not that of the connection. */
+    public boolean alive() {
+        return link.alive();
+    }
+
     /** Does work whole, or not at all. */
     public <T> T whole(Supplier<T> work) {
         return link.whole(work);
@@ -92,6 +102,12 @@ public final class OfficeTables implements AutoCloseable {
 
     public void add(DeedRow deed) {
         link.run(DEED, deed.sequence(), deed.at(), deed.person(), deed.device(), deed.code(), deed.payload());
+    }
+
+    /** Whether a desk did a deed of that kind at that moment: told apart from one that was cut off in between. */
+    public boolean did(UUID device, String at, String code) {
+        return !link.rows("select 1 from deed where device = ? and made_at = ? and code = ?", row -> row.getInt(1),
+                device, at, code).isEmpty();
     }
 
     /** The deeds of one kind after a number, in their order. */
@@ -282,6 +298,18 @@ public final class OfficeTables implements AutoCloseable {
                     zone.clashes(), zone.clockWrong(), zone.latest().isEmpty(), zone.zone().key());
         }
         link.runBatch(STANDS);
+    }
+
+    /** Those of the zones that hold contents that clash. */
+    public List<ZoneId> clashing(Collection<ZoneId> zones) {
+        return link.rows("select zone from zone where zone = any(?) and clashes > 0",
+                row -> ZoneId.ofKey(row.getString(1)), link.texts(zones.stream().map(ZoneId::key).toList()));
+    }
+
+    /** Which of these contents are here. */
+    public Set<String> known(Collection<String> digests) {
+        return new HashSet<>(link.rows("select digest from survey where digest = any(?)", row -> row.getString(1),
+                link.texts(digests)));
     }
 
     /** Zones that wait to be judged, at most so many. */

@@ -24,7 +24,7 @@ public record ZoneRow(ZoneNames names, Standing standing, boolean judged, Option
                 row.getString(7), row.getString(8), row.getString(9), row.getBoolean(10));
         Standing standing = new Standing(zone, Optional.ofNullable(row.getString(11)),
                 Optional.ofNullable(row.getString(12)).map(InspectionStatus::valueOf),
-                CopyRow.number(row, "visited"), Optional.ofNullable(row.getString(14)), CopyRow.number(row, "moment"),
+                CopyRow.number(row, 13), Optional.ofNullable(row.getString(14)), CopyRow.number(row, 15),
                 row.getInt(16), row.getBoolean(17));
         int level = row.getInt(19);
         Optional<Verdict> verdict = row.wasNull() ? Optional.empty() : Optional.of(new Verdict(level,

@@ -13,7 +13,6 @@ import bedmark.screen.Workplace;
 import bedmark.screen.round.RoundModel;
 import bedmark.screen.round.RoundRow;
 import bedmark.survey.Act;
-import bedmark.survey.Assessor;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.QueueState;
 import bedmark.survey.Survey;

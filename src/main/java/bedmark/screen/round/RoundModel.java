@@ -109,11 +109,9 @@ public final class RoundModel {
 
     /** What other rounds found at a transfer point last. */
     private Optional<SurveyLine> lastLine(Register.Transfer transfer) {
-        return workplace.store().surveys(SurveyQuery.ALL.ofTransfer(transfer.id()).current()
-                        .in(QueueState.COMPLETED, QueueState.QUEUED, QueueState.EXPORTED, QueueState.RECEIVED)).stream()
-                .filter(line -> !line.round().equals(Optional.of(round.id())))
-                .filter(line -> line.inspectionStatus() == InspectionStatus.INSPECTED)
-                .reduce((earlier, later) -> later);
+        return workplace.store().surveys(SurveyQuery.ALL.ofTransfer(transfer.id()).besideRound(round.id()).current()
+                .inspected().in(QueueState.COMPLETED, QueueState.QUEUED, QueueState.EXPORTED, QueueState.RECEIVED)
+                .newest(1)).stream().findFirst();
     }
 
     private void filter() {

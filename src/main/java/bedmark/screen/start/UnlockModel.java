@@ -13,7 +13,7 @@ import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleBooleanProperty;
 
-/** Opens a store that is encrypted, with what the person types; trying takes time, and so it is done beside the screen. */
+/** Opens a store that is encrypted, with what the person types; that takes time and is done beside the screen. */
 public final class UnlockModel {
     private final Function<Passphrase, Store> opening;
     private final Executor screen;

@@ -19,14 +19,14 @@ create index deed_code on deed (code, seq);
 
 -- Packs that were taken in. On a server the content lies here, else in the folder.
 create table pack (
-  sha256 char(64) primary key,
+  sha256 varchar(64) primary key,
   seq bigint not null,
   content ${bytes}
 );
 
 -- Every version of a plant's register that a survey was made with.
 create table register (
-  digest char(64) primary key,
+  digest varchar(64) primary key,
   plant varchar not null,
   content ${bytes} not null
 );
@@ -36,14 +36,14 @@ create table plant (
   id varchar primary key,
   made bigint not null,
   own boolean not null,
-  digest char(64) not null,
-  register char(64) not null,
+  digest varchar(64) not null,
+  register varchar(64) not null,
   content ${bytes} not null
 );
 
 -- Every content of every survey, once.
 create table survey (
-  digest char(64) primary key,
+  digest varchar(64) primary key,
   id uuid not null,
   revision int not null,
   supersedes uuid,
@@ -53,10 +53,10 @@ create table survey (
   begun bigint,
   finished bigint,
   made bigint not null,
-  register char(64) not null,
+  register varchar(64) not null,
   conveyor varchar not null,
   drive varchar not null,
-  pack char(64) not null,
+  pack varchar(64) not null,
   content bytea not null
 );
 create index survey_zone on survey (zone);
@@ -76,10 +76,10 @@ create table zone (
   asset varchar not null,
   material varchar not null,
   registered boolean not null,
-  visit char(64),
+  visit varchar(64),
   visit_status varchar(20),
   visited bigint,
-  latest char(64),
+  latest varchar(64),
   moment bigint,
   clashes int not null,
   clock_wrong boolean not null,

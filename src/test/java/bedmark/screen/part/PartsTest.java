@@ -12,7 +12,6 @@ import bedmark.screen.theme.Light;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalInt;
 import javafx.css.PseudoClass;
 import javafx.scene.Node;

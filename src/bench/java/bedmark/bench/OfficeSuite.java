@@ -1,0 +1,206 @@
+package bedmark.bench;
+
+import bedmark.document.Branch;
+import bedmark.document.Node;
+import bedmark.index.office.OfficeTables;
+import bedmark.index.office.Standing;
+import bedmark.index.office.Verdict;
+import bedmark.index.office.ZoneNames;
+import bedmark.journal.Progress;
+import bedmark.json.BundleReader;
+import bedmark.office.OfficeOptions;
+import bedmark.office.OfficeStore;
+import bedmark.office.RankedZone;
+import bedmark.office.Received;
+import bedmark.pack.DeviceKey;
+import bedmark.pack.PackWriter;
+import bedmark.pack.PhotoSource;
+import bedmark.survey.Bundle;
+import bedmark.survey.InspectionStatus;
+import bedmark.survey.merge.ZoneId;
+import java.io.File;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.security.MessageDigest;
+import java.sql.Connection;
+import java.sql.DriverManager;
+import java.sql.PreparedStatement;
+import java.sql.ResultSet;
+import java.sql.Statement;
+import java.time.Clock;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.OptionalLong;
+import java.util.Random;
+import java.util.UUID;
+import java.util.stream.Stream;
+
+/** The office: receiving beside the least that a database could do with the same rows, and ranking many zones. */
+final class OfficeSuite implements Suite {
+    private static final int SURVEYS = 100;
+    private static final int ZONES = 200_000;
+    private static final String ROWS = "select digest, id, revision, supersedes, zone, round, status, begun, finished, "
+            + "made, register, conveyor, drive, pack, content from survey order by pack";
+
+    private final Random random = new Random(3);
+
+    @Override
+    public String name() {
+        return "office";
+    }
+
+    @Override
+    public List<Row> run() throws Exception {
+        Path folder = Files.createTempDirectory("bedmark-office-bench");
+        try {
+            Path tablet = Files.createDirectories(folder.resolve("tablet"));
+            List<Path> packs = packs(folder, tablet, 110);
+            receive(folder.resolve("warm"), tablet, packs.subList(100, 110));
+            double ten = receive(folder.resolve("ten"), tablet, packs.subList(0, 10));
+            double hundred = receive(folder.resolve("hundred"), tablet, packs.subList(0, 100));
+            raw(folder, packs.subList(0, 100), "warm-raw");
+            double raw = raw(folder, packs.subList(0, 100), "raw");
+            return List.of(
+                    new Row("office, 100 packs of 100 surveys received", hundred, "s", 2 * raw, true),
+                    new Row("office, JDBC batch insert of the same rows and SHA-256 of the same bytes", raw, "s", raw,
+                            true),
+                    new Row("office, 10 times the surveys: times the time", hundred / ten, "", 11, true),
+                    new Row("office, 200,000 zones ranked", rank(folder.resolve("rank")), "s", 1, true));
+        } finally {
+            try (Stream<Path> files = Files.walk(folder)) {
+                files.sorted(Comparator.reverseOrder()).map(Path::toFile).forEach(File::delete);
+            }
+        }
+    }
+
+    /** Packs as a tablet makes them: the demo plant's register, form and surveys, each survey with an id of its own. */
+    private List<Path> packs(Path folder, Path tablet, int count) throws IOException {
+        Branch sample = BundleReader.read(Files.readAllBytes(Path.of("sample-surveys/round-2026-03.json"))).document();
+        List<Branch> surveys = sample.branches("surveys").stream().filter(survey -> !survey.has("supersedes")).toList();
+        DeviceKey key = DeviceKey.of(tablet);
+        List<Path> packs = new ArrayList<>();
+        for (int pack = 0; pack < count; pack++) {
+            List<Node> held = new ArrayList<>();
+            for (int i = 0; i < SURVEYS; i++) {
+                held.add(surveys.get(i % surveys.size()).without("photos")
+                        .with("id", new UUID(random.nextLong(), random.nextLong()).toString())
+                        .with("round", "round-" + pack + "-" + i / surveys.size()));
+            }
+            Path out = folder.resolve("pack" + pack + ".zip");
+            PackWriter.write(new Bundle(sample.with("id", UUID.randomUUID().toString())
+                    .with("surveys", new Node.Series(held))), PhotoSource.folder(folder), key, out, Progress.NONE);
+            packs.add(out);
+        }
+        return packs;
+    }
+
+    private static double receive(Path office, Path tablet, List<Path> packs) {
+        try (OfficeStore store = OfficeStore.open(office, OfficeOptions.of(Clock.systemUTC()))) {
+            store.trust(DeviceKey.of(tablet).fingerprint().text(), "", "bench");
+            long start = System.nanoTime();
+            List<Received> received = store.receive(packs, "bench", Progress.NONE);
+            double time = (System.nanoTime() - start) / 1e9;
+            if (!received.stream().allMatch(one -> one instanceof Received.Taken taken && taken.fresh() == SURVEYS)) {
+                throw new IllegalStateException("not everything was received");
+            }
+            return time;
+        }
+    }
+
+    /** What no office could do without. */
+    private static double raw(Path folder, List<Path> packs, String name) throws Exception {
+        List<Object[]> rows = new ArrayList<>();
+        try (Connection from = DriverManager.getConnection("jdbc:h2:file:" + folder.resolve("hundred/index/office"), "",
+                ""); ResultSet read = from.createStatement().executeQuery(ROWS)) {
+            while (read.next()) {
+                Object[] row = new Object[15];
+                for (int i = 0; i < row.length; i++) {
+                    row[i] = i == 14 ? read.getBytes(15) : read.getObject(i + 1);
+                }
+                rows.add(row);
+            }
+        }
+        String schema = Files.readString(Path.of("src/main/resources/bedmark/index/office/V1__office.sql"))
+                .replace("${bytes}", "blob").replaceAll("(?m)^--.*$", "");
+        try (Connection into = DriverManager.getConnection("jdbc:h2:file:" + folder.resolve(name + "/office")
+                + ";WRITE_DELAY=0", "", ""); Statement layOut = into.createStatement()) {
+            for (String command : schema.split(";")) {
+                if (!command.isBlank()) {
+                    layOut.execute(command);
+                }
+            }
+            into.setAutoCommit(false);
+            long start = System.nanoTime();
+            for (Path pack : packs) {
+                MessageDigest.getInstance("SHA-256").digest(Files.readAllBytes(pack));
+            }
+            try (PreparedStatement insert = into.prepareStatement("insert into survey values (?, ?, ?, ?, ?, ?, ?, ?, "
+                    + "?, ?, ?, ?, ?, ?, ?)")) {
+                for (int i = 0; i < rows.size(); i++) {
+                    for (int column = 0; column < 15; column++) {
+                        insert.setObject(column + 1, rows.get(i)[column]);
+                    }
+                    insert.addBatch();
+                    if ((i + 1) % SURVEYS == 0) {
+                        insert.executeBatch();
+                        into.commit();
+                    }
+                }
+            }
+            return (System.nanoTime() - start) / 1e9;
+        }
+    }
+
+    private double rank(Path office) throws IOException {
+        Path index = Files.createDirectories(office.resolve("index"));
+        try (OfficeTables tables = OfficeTables.of(index)) {
+            tables.whole(() -> fill(tables));
+        }
+        try (OfficeStore store = OfficeStore.open(office, OfficeOptions.of(Clock.systemUTC()))) {
+            double best = Double.POSITIVE_INFINITY;
+            for (int i = 0; i < 5; i++) {
+                long start = System.nanoTime();
+                List<RankedZone> ranked = store.rank();
+                best = Math.min(best, (System.nanoTime() - start) / 1e9);
+                if (ranked.size() != ZONES) {
+                    throw new IllegalStateException("ranked " + ranked.size());
+                }
+            }
+            return best;
+        }
+    }
+
+    private boolean fill(OfficeTables tables) {
+        for (int plant = 0; plant < 100; plant++) {
+            List<ZoneNames> names = new ArrayList<>();
+            List<Standing> standings = new ArrayList<>();
+            Map<ZoneId, Optional<Verdict>> verdicts = new HashMap<>();
+            for (int i = 0; i < ZONES / 100; i++) {
+                ZoneId zone = new ZoneId("plant-" + plant, "TP-" + i);
+                names.add(new ZoneNames(zone, "Plant " + plant, "Area " + i % 7, "C" + i / 3, "C" + i / 3, "TP-" + i,
+                        "A-" + i, "Limestone", true));
+                standings.add(new Standing(zone, Optional.of("d" + i), Optional.of(InspectionStatus.INSPECTED),
+                        OptionalLong.of(1_750_000_000_000L + i), Optional.of("d" + i),
+                        OptionalLong.of(1_750_000_000_000L + i), 0, false));
+                verdicts.put(zone, Optional.of(new Verdict(random.nextInt(5), false, share(), share(), share(),
+                        OptionalDouble.empty(), OptionalDouble.empty(), Optional.of("widen-boards"), share(),
+                        OptionalDouble.empty(), OptionalDouble.empty(), Optional.of("electrical"), Optional.of("EUR"),
+                        i % 3 == 0 ? "bed-over-design near 1.15 0.05" : "")));
+            }
+            tables.name("plant-" + plant, "Plant " + plant, names);
+            tables.put(standings);
+            tables.judge(verdicts);
+        }
+        return true;
+    }
+
+    private OptionalDouble share() {
+        return OptionalDouble.of(random.nextDouble());
+    }
+}

@@ -1,0 +1,234 @@
+package bedmark.bench;
+
+import bedmark.index.Store;
+import bedmark.screen.BedmarkApp;
+import bedmark.screen.Shell;
+import bedmark.screen.Workplace;
+import java.lang.management.ManagementFactory;
+import java.nio.file.Path;
+import java.time.Clock;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.concurrent.CountDownLatch;
+import javafx.animation.AnimationTimer;
+import javafx.application.Platform;
+import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
+import javafx.event.Event;
+import javafx.scene.Node;
+import javafx.scene.Scene;
+import javafx.scene.control.ButtonBase;
+import javafx.scene.control.Label;
+import javafx.scene.control.TextInputControl;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
+import javafx.scene.layout.StackPane;
+import javafx.stage.Stage;
+
+/**
+ * A person at the screen: opens transfer points again and again, then types depths, a key a frame, in turn with a label
+ * in a bare window that follows a property. Prints what the screen's thread did for each.
+ */
+public final class ScreenProbe {
+    private static final String POINT = "TP-08";
+    private static final int WARM_UP = 30;
+
+    private ScreenProbe() {
+    }
+
+    /** @param arguments the store's folder, how often to open, how many keys */
+    public static void main(String[] arguments) throws Exception {
+        int opens = Integer.parseInt(arguments[1]);
+        int keys = Integer.parseInt(arguments[2]);
+        CountDownLatch done = new CountDownLatch(1);
+        try (Store store = Store.open(Path.of(arguments[0]), BedmarkApp.options(Clock.systemUTC()))) {
+            Platform.startup(() -> {
+                Workplace workplace = new Workplace(store, Clock.systemUTC(), Platform::runLater,
+                        (title, begin) -> Optional.empty(), Optional.empty());
+                Shell shell = new Shell(workplace, 1280, 800);
+                Stage stage = new Stage();
+                stage.setScene(shell.scene());
+                stage.show();
+                new Person(shell.scene(), opens, keys, done).start();
+            });
+            done.await();
+        }
+        System.out.flush();
+        Runtime.getRuntime().halt(0);
+    }
+
+    /** What the screen's thread itself worked so far (ms): a busy machine makes it wait, but does not make it work. */
+    private static double worked() {
+        return ManagementFactory.getThreadMXBean().getCurrentThreadCpuTime() / 1e6;
+    }
+
+    private static void tell(String what, double[] millis) {
+        double[] sorted = millis.clone();
+        Arrays.sort(sorted);
+        System.out.printf(Locale.ROOT, "%s %.4f %.4f %.4f%n", what, sorted[sorted.length / 2],
+                sorted[(int) (sorted.length * 0.95)], sorted[(int) (sorted.length * 0.99)]);
+    }
+
+    /** Does one thing at each frame. */
+    private static final class Person extends AnimationTimer {
+        private final Scene scene;
+        private final CountDownLatch done;
+        private final int opens;
+        private final List<Double> opened = new ArrayList<>();
+        private final List<Double> workedForOpening = new ArrayList<>();
+        private final Typist typist;
+        private double workedBefore;
+        private long pressed;
+        private boolean waiting;
+
+        Person(Scene scene, int opens, int keys, CountDownLatch done) {
+            this.scene = scene;
+            this.opens = opens;
+            this.done = done;
+            this.typist = new Typist(scene, keys);
+            scene.addPostLayoutPulseListener(this::laidOut);
+        }
+
+        /** The point is open once its first frame is laid out. */
+        private void laidOut() {
+            if (waiting && scene.lookup("#verdict") != null) {
+                opened.add((System.nanoTime() - pressed) / 1e6);
+                workedForOpening.add(worked() - workedBefore);
+                waiting = false;
+            }
+        }
+
+        @Override
+        public void handle(long now) {
+            if (waiting) {
+                return;
+            }
+            if (scene.lookup("#person") instanceof TextInputControl person) {
+                person.setText("A. Vale");
+                press("#caution-read");
+                press("#start-walk");
+            } else if (opened.size() < WARM_UP + opens) {
+                openOrReturn();
+            } else if (scene.lookup("#correct") != null) {
+                press("#correct");
+            } else if (scene.lookup("#pad-next") != null && typist.typed(now)) {
+                stop();
+                tell("open", opened.stream().skip(WARM_UP).mapToDouble(Double::doubleValue).toArray());
+                tell("open-work", workedForOpening.stream().skip(WARM_UP).mapToDouble(Double::doubleValue).toArray());
+                typist.tell();
+                done.countDown();
+            }
+        }
+
+        private void openOrReturn() {
+            if (scene.lookup("#verdict") != null) {
+                press("#foot-round");
+            } else if (scene.lookup("#stop-" + POINT) != null) {
+                waiting = true;
+                workedBefore = worked();
+                pressed = System.nanoTime();
+                press("#stop-" + POINT);
+            }
+        }
+
+        private void press(String id) {
+            Node node = scene.lookup(id);
+            if (node instanceof ButtonBase button && !button.isDisabled()) {
+                button.fire();
+            }
+        }
+    }
+
+    /** Types into the depths, and changes a label in a bare window, in turn. */
+    private static final class Typist {
+        private static final String TYPED = "262\r";
+        private static final double FRAME = 1000 / 60.0;
+
+        private final Scene scene;
+        private final StringProperty text = new SimpleStringProperty("");
+        private final Scene bare;
+        private final double[] keys;
+        private final double[] labels;
+        private final double[] keysWorked;
+        private int turn = -2 * WARM_UP;
+        private long lastFrame;
+        private int keysMissed;
+        private int labelsMissed;
+
+        Typist(Scene scene, int keys) {
+            this.scene = scene;
+            this.keys = new double[keys];
+            this.labels = new double[keys];
+            this.keysWorked = new double[keys];
+            Label label = new Label();
+            label.textProperty().bind(text);
+            bare = new Scene(new StackPane(label), 200, 100);
+            Stage stage = new Stage();
+            stage.setScene(bare);
+            stage.show();
+        }
+
+        /** Whether all is typed. */
+        boolean typed(long now) {
+            double sinceLast = (now - lastFrame) / 1e6;
+            if (turn > 0) {
+                boolean missed = sinceLast > 1.5 * FRAME;
+                keysMissed += missed && turn % 2 == 1 ? 1 : 0;
+                labelsMissed += missed && turn % 2 == 0 ? 1 : 0;
+            }
+            lastFrame = now;
+            if (turn >= 2 * keys.length) {
+                return true;
+            }
+            int at = Math.floorDiv(turn, 2);
+            boolean key = Math.floorMod(turn, 2) == 0;
+            double millis = key ? key(at) : label(at);
+            if (turn >= 0) {
+                (key ? keys : labels)[at] = millis;
+            }
+            turn++;
+            return false;
+        }
+
+        private double key(int at) {
+            char sign = TYPED.charAt(Math.floorMod(at, TYPED.length()));
+            Node first = scene.lookup("#slot-readings-bedDepths-0-depth");
+            if (first != null && Math.floorMod(at, 16) == 0) {
+                first.requestFocus();
+            }
+            Node target = scene.getFocusOwner();
+            double before = worked();
+            long start = System.nanoTime();
+            Event.fireEvent(target, sign == '\r'
+                    ? new KeyEvent(KeyEvent.KEY_PRESSED, "", "", KeyCode.ENTER, false, false, false, false)
+                    : new KeyEvent(KeyEvent.KEY_TYPED, String.valueOf(sign), "", KeyCode.UNDEFINED, false, false,
+                            false, false));
+            scene.getRoot().applyCss();
+            scene.getRoot().layout();
+            double taken = (System.nanoTime() - start) / 1e6;
+            if (at >= 0) {
+                keysWorked[at] = worked() - before;
+            }
+            return taken;
+        }
+
+        private double label(int at) {
+            long start = System.nanoTime();
+            text.set(Integer.toString(at));
+            bare.getRoot().applyCss();
+            bare.getRoot().layout();
+            return (System.nanoTime() - start) / 1e6;
+        }
+
+        void tell() {
+            ScreenProbe.tell("key", keys);
+            ScreenProbe.tell("key-work", keysWorked);
+            ScreenProbe.tell("label", labels);
+            System.out.printf(Locale.ROOT, "missed %.5f %.5f%n", 100.0 * keysMissed / keys.length,
+                    100.0 * labelsMissed / labels.length);
+        }
+    }
+}

@@ -1,0 +1,118 @@
+package bedmark.office;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+import static org.junit.jupiter.api.Assumptions.assumeTrue;
+
+import bedmark.journal.Digest;
+import bedmark.journal.Progress;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+import java.util.Map;
+import java.util.Random;
+import java.util.TreeMap;
+import java.util.concurrent.CountDownLatch;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.AfterAll;
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Tag;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** An office that several desks share, on a real PostgreSQL that the test starts. */
+@Tag("outside-tool")
+class SharedOfficeTest {
+    private static final int DESKS = 8;
+    private static PostgresServer server;
+
+    @TempDir
+    private Path folder;
+
+    @BeforeAll
+    static void startServer() throws Exception {
+        assumeTrue(PostgresServer.possible(), "needs Linux on amd64 with tar, xz and, as root, setpriv");
+        server = PostgresServer.start();
+    }
+
+    @AfterAll
+    static void endServer() throws Exception {
+        if (server != null) {
+            server.close();
+        }
+    }
+
+    private OfficeStore desk(int number) {
+        return OfficeStore.open(server.url(), folder.resolve("desk" + number), OfficeOptions.of(Offices.NOW));
+    }
+
+    /**
+     * Eight desks receive overlapping packs, each in an order of its own, while the server is ended without warning and
+     * started again. A folder that received the same packs is the measure: nothing is lost and nothing doubled.
+     */
+    @Test
+    void eightDesksAndARestartLoseNothingAndDoubleNothing() throws Exception {
+        Tablets tablets = new Tablets(20260302);
+        List<Path> packs = tablets.packs(folder, 4);
+        Path[] keys = {tablets.key(folder, 0), tablets.key(folder, 1), tablets.key(folder, 2)};
+        try (OfficeStore first = desk(99)) {
+            for (Path key : keys) {
+                first.trust(Offices.fingerprint(key), "", "Ida Marsh");
+            }
+        }
+        CountDownLatch halfWay = new CountDownLatch(DESKS * packs.size() / 3);
+        ExecutorService desks = Executors.newFixedThreadPool(DESKS);
+        List<Future<List<Received>>> work = new ArrayList<>();
+        for (int i = 0; i < DESKS; i++) {
+            int number = i;
+            work.add(desks.submit(() -> receive(number, packs, halfWay)));
+        }
+        halfWay.await();
+        server.restart();
+        List<Received> all = new ArrayList<>();
+        for (Future<List<Received>> one : work) {
+            all.addAll(one.get());
+        }
+        desks.shutdown();
+        assertEquals(DESKS * packs.size(), all.size());
+        assertTrue(all.stream().noneMatch(one -> one instanceof Received.Turned), all::toString);
+        try (OfficeStore shared = desk(0); OfficeStore alone = Offices.trusting(folder.resolve("alone"), keys)) {
+            packs.forEach(pack -> assertInstanceOf(Received.Taken.class, alone.receive(pack, "Ida Marsh")));
+            assertEquals(packs.size(), shared.packs().size());
+            assertEquals(Offices.told(alone), Offices.told(shared));
+            new OfficeExport(alone).write(folder.resolve("export-alone"), Progress.NONE);
+            new OfficeExport(shared).write(folder.resolve("export-shared"), Progress.NONE);
+            assertEquals(files(folder.resolve("export-alone")), files(folder.resolve("export-shared")));
+        }
+    }
+
+    private List<Received> receive(int number, List<Path> packs, CountDownLatch halfWay) {
+        List<Path> own = new ArrayList<>(packs);
+        Collections.shuffle(own, new Random(number));
+        List<Received> received = new ArrayList<>();
+        try (OfficeStore store = desk(number)) {
+            for (Path pack : own) {
+                received.add(store.receive(pack, "Desk " + number));
+                halfWay.countDown();
+            }
+        }
+        return received;
+    }
+
+    private static Map<String, String> files(Path folder) throws IOException {
+        Map<String, String> digests = new TreeMap<>();
+        try (Stream<Path> files = Files.walk(folder)) {
+            for (Path file : files.filter(Files::isRegularFile).toList()) {
+                digests.put(folder.relativize(file).toString(), Digest.of(Files.readAllBytes(file)).hex());
+            }
+        }
+        return digests;
+    }
+}

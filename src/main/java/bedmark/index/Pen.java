@@ -74,8 +74,10 @@ final class Pen {
     }
 
     private void forget() {
-        List<UUID> oldestFirst = List.copyOf(known.keySet());
-        oldestFirst.subList(0, Math.max(0, oldestFirst.size() - KEPT)).forEach(known::remove);
+        if (known.size() > 2 * KEPT) {
+            List<UUID> oldestFirst = List.copyOf(known.keySet());
+            oldestFirst.subList(0, oldestFirst.size() - KEPT).forEach(known::remove);
+        }
     }
 
     /** The index hears of the entry before it is asked anything else; while more wait, it need not be made last. */

@@ -54,7 +54,7 @@ final class OfficeTrendCommand implements Callable<Integer> {
                 progress)) {
             ZoneId zone = OfficeDesk.zone(store, transfer);
             ZoneTrend trend = store.trend(zone);
-            progress.close();
+            progress.done();
             if (json) {
                 surroundings.out().print(new String(JsonWriter.indented(TrendDocument.of(trend)),
                         StandardCharsets.UTF_8));

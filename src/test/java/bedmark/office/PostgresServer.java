@@ -82,7 +82,7 @@ final class PostgresServer implements AutoCloseable {
         up();
     }
 
-    private void tool(String name, String... arguments) throws Exception {
+    private void tool(String name, String... arguments) throws IOException, InterruptedException {
         List<String> command = new ArrayList<>();
         if (root()) {
             command.addAll(List.of("setpriv", "--reuid=" + NOBODY, "--regid=" + NOBODY, "--clear-groups"));
@@ -108,8 +108,13 @@ final class PostgresServer implements AutoCloseable {
     }
 
     @Override
-    public void close() throws Exception {
-        tool("pg_ctl", "-D", data(), "-w", "-m", "immediate", "stop");
+    public void close() throws IOException {
+        try {
+            tool("pg_ctl", "-D", data(), "-w", "-m", "immediate", "stop");
+        } catch (InterruptedException e) {
+            Thread.currentThread().interrupt();
+            throw new IOException("interrupted while the server was stopped", e);
+        }
         try (Stream<Path> files = Files.walk(home)) {
             for (Path file : files.sorted(Comparator.reverseOrder()).toList()) {
                 Files.delete(file);

@@ -26,7 +26,7 @@ import javafx.scene.text.Text;
  */
 final class TrendChart extends Pane {
     private static final double DAY = 86_400_000.0;
-    private static final double TICKS = 4;
+    private static final double TICKS = 5;
 
     private final Series series;
     private final List<Change> changes;
@@ -92,7 +92,7 @@ final class TrendChart extends Pane {
         }
     }
 
-    /** A round step that gives about four lines: 1, 2 or 5 times a power of ten. */
+    /** A round step that gives about five lines: 1, 2 or 5 times a power of ten. */
     private double step() {
         double rough = top / TICKS;
         double power = Math.pow(10, Math.floor(Math.log10(rough)));

@@ -56,11 +56,14 @@ final class ZoneCell extends ListCell<RankedZone> {
         LevelGlyph glyph = new LevelGlyph(shape(zone.place()));
         Label name = label("zone-name", zone.names().tag() + "  ›  " + zone.names().conveyorTag());
         Label where = label("soft", String.join(", ", List.of(zone.names().area(), zone.names().plant())));
+        name.setMinWidth(Region.USE_PREF_SIZE);
         HBox first = new HBox(name, where);
         first.getStyleClass().add("line");
         first.setAlignment(Pos.BASELINE_LEFT);
         Label findings = label("findings", wording.text("office.place." + zone.place().code()) + (zone.open().isEmpty()
                 ? "" : ": " + zone.open().stream().map(this::finding).collect(Collectors.joining(", "))));
+        findings.setWrapText(true);
+        findings.setMinHeight(Region.USE_PREF_SIZE);
         VBox words = new VBox(first, findings);
         words.setMinWidth(0);
         HBox.setHgrow(words, Priority.ALWAYS);

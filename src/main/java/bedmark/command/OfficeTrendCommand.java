@@ -5,6 +5,7 @@ import bedmark.office.JudgedZone;
 import bedmark.office.OfficeStore;
 import bedmark.office.trend.TrendDocument;
 import bedmark.office.trend.ZoneTrend;
+import bedmark.report.TrendTelling;
 import bedmark.quantity.UnitSystem;
 import bedmark.survey.merge.ZoneId;
 import bedmark.wording.Wording;
@@ -60,7 +61,7 @@ final class OfficeTrendCommand implements Callable<Integer> {
             } else {
                 Optional<JudgedZone> own = store.judged(zone);
                 Optional<JudgedZone> today = store.judgedToday(zone);
-                new TrendText(new Wording(surroundings.words(), system)).lines(trend, own, today)
+                new TrendTelling(new Wording(surroundings.words(), system)).lines(trend, own, today)
                         .forEach(line -> surroundings.out().println(line));
             }
             surroundings.out().flush();

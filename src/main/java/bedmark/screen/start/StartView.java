@@ -46,6 +46,7 @@ public final class StartView extends SidedScreen {
     private final VBox questions = new VBox();
     private final ScrollPane scroll = new ScrollPane(questions);
     private final TextField person = new TextField();
+    private final RoundTakingPane office;
 
     public StartView(Workplace workplace, StartModel model, Navigator navigator) {
         super("safety-card");
@@ -59,6 +60,7 @@ public final class StartView extends SidedScreen {
         settings.getStyleClass().add("secondary-target");
         frame(Heads.head(workplace, listening, wording.text("screen.name"), wording.text("screen.start.title"),
                 settings), footBar());
+        office = new RoundTakingPane(workplace, new RoundTaking(workplace), listening);
         questions.getStyleClass().add("questions");
         side.getStyleClass().add("safety-card");
         scroll.setFitToWidth(true);
@@ -76,7 +78,7 @@ public final class StartView extends SidedScreen {
         questions.getChildren().clear();
         if (!model.hasPlant() || model.loadingProperty().get() >= 0) {
             offerDemo();
-            questions.getChildren().addAll(choice("screen.start.language", languages()));
+            questions.getChildren().addAll(choice("screen.start.language", languages()), office);
             return;
         }
         person.setId("person");
@@ -90,7 +92,7 @@ public final class StartView extends SidedScreen {
         name.setLabelFor(person);
         questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()), progress(), limits(),
                 pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
-                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())));
+                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())), office);
     }
 
     /** How far the chosen round is: in words, and as its strip of ticks. */

@@ -4,6 +4,7 @@ import bedmark.index.Store;
 import bedmark.screen.BedmarkApp;
 import bedmark.screen.Shell;
 import bedmark.screen.Workplace;
+import bedmark.screen.zone.FormOpening;
 import java.lang.management.ManagementFactory;
 import java.nio.file.Path;
 import java.time.Clock;
@@ -36,6 +37,7 @@ public final class ScreenProbe {
     private static final String POINT = "TP-08";
     private static final String DEPTH = "#slot-readings-bedDepths-0-depth";
     private static final int WARM_UP = 30;
+    private static final int FORM_TURNS = 60;
 
     private ScreenProbe() {
     }
@@ -53,7 +55,7 @@ public final class ScreenProbe {
                 Stage stage = new Stage();
                 stage.setScene(shell.scene());
                 stage.show();
-                new Person(shell.scene(), opens, keys, done).start();
+                new Person(workplace, shell.scene(), opens, keys, done).start();
             });
             done.await();
         }
@@ -75,6 +77,7 @@ public final class ScreenProbe {
 
     /** Does one thing at each frame. */
     private static final class Person extends AnimationTimer {
+        private final Workplace workplace;
         private final Scene scene;
         private final CountDownLatch done;
         private final int opens;
@@ -85,7 +88,8 @@ public final class ScreenProbe {
         private long pressed;
         private boolean waiting;
 
-        Person(Scene scene, int opens, int keys, CountDownLatch done) {
+        Person(Workplace workplace, Scene scene, int opens, int keys, CountDownLatch done) {
+            this.workplace = workplace;
             this.scene = scene;
             this.opens = opens;
             this.done = done;
@@ -122,8 +126,19 @@ public final class ScreenProbe {
                 tell("open", opened.stream().skip(WARM_UP).mapToDouble(Double::doubleValue).toArray());
                 tell("open-work", workedForOpening.stream().skip(WARM_UP).mapToDouble(Double::doubleValue).toArray());
                 typist.tell();
+                System.out.printf(Locale.ROOT, "form %.4f%n", formRatio());
                 done.countDown();
             }
+        }
+
+        /** The time that a form of 200 fields takes to open, over that of one of 20. */
+        private double formRatio() {
+            StackPane room = new StackPane();
+            Stage stage = new Stage();
+            stage.setScene(new Scene(room, 490, 300));
+            stage.getScene().getStylesheets().setAll(scene.getStylesheets());
+            stage.show();
+            return FormOpening.ratio(workplace, room, 200, 20, FORM_TURNS);
         }
 
         private void openOrReturn() {

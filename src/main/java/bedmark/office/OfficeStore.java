@@ -12,6 +12,7 @@ import bedmark.index.office.Verdict;
 import bedmark.index.office.ZoneRow;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
+import bedmark.journal.NotSaved;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.json.JsonReader;
@@ -36,6 +37,7 @@ import bedmark.survey.merge.ZoneId;
 import java.io.ByteArrayOutputStream;
 import java.io.Closeable;
 import java.io.IOException;
+import java.lang.ref.SoftReference;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Duration;
@@ -79,6 +81,7 @@ public final class OfficeStore implements AutoCloseable {
     /** Packs that were proved, for their photos. */
     private final Map<String, ReadPack> open = new HashMap<>();
     private Minutes minutes = new Minutes();
+    private SoftReference<List<ZoneRow>> rows = new SoftReference<>(null);
     private final AtomicBoolean closed = new AtomicBoolean();
 
     private OfficeStore(Path folder, Optional<String> url, OfficeOptions options, Desk desk, Closeable lock,
@@ -198,7 +201,8 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     /**
-     * Takes packs in, one after the other; each whole or not at all. A person may stop it between two of them.
+     * Takes packs in, one after the other; each whole or not at all. The next ones are proved meanwhile. A person may
+     * stop it between two of them.
      *
      * @param person   who receives
      * @param progress told of the packs, and asked whether to stop
@@ -206,12 +210,15 @@ public final class OfficeStore implements AutoCloseable {
      */
     public List<Received> receive(List<Path> files, String person, Progress progress) {
         List<Received> received = new ArrayList<>();
-        for (Path file : files) {
-            if (progress.cancelled()) {
-                return received;
+        try (Provers provers = new Provers(files, this::prove)) {
+            while (received.size() < files.size()) {
+                if (progress.cancelled()) {
+                    provers.rest().forEach(proved -> proved.laid().ifPresent(laid -> shelf.drop(laid.part())));
+                    return received;
+                }
+                progress.at(received.size(), files.size());
+                received.add(take(provers.next(), person));
             }
-            progress.at(received.size(), files.size());
-            received.add(receive(file, person));
         }
         progress.at(files.size(), files.size());
         return received;
@@ -219,23 +226,54 @@ public final class OfficeStore implements AutoCloseable {
 
     /** Takes one pack in, whole or not at all. Receiving it again changes nothing. */
     public Received receive(Path file, String person) {
-        Optional<String> fingerprint = Optional.empty();
-        Optional<Path> part = Optional.empty();
+        return take(prove(file), person);
+    }
+
+    /**
+     * A pack that was looked at; nothing of it is taken in yet.
+     *
+     * @param laid   its copy in the store's folder
+     * @param pack   what it holds, where it is sound
+     * @param defect why it is refused, where it is not
+     */
+    record Proved(Path file, Optional<PackShelf.Laid> laid, Optional<ReadPack> pack, Optional<Intake> intake,
+                  Optional<Defect> defect) {
+    }
+
+    /** Looks at a pack in the calling thread. */
+    private Proved prove(Path file) {
+        Optional<PackShelf.Laid> laid = Optional.empty();
         try {
-            PackShelf.Laid laid = shelf.lay(file);
-            part = Optional.of(laid.part());
-            ReadPack pack = new PackReader(options.limits(), BundleReader::read).open(laid.part(), Progress.NONE);
-            fingerprint = Optional.of(pack.fingerprint().text());
-            return take(file, laid, pack, person);
+            laid = Optional.of(shelf.lay(file));
+            ReadPack pack = new PackReader(options.limits(), BundleReader::read).open(laid.get().part(),
+                    Progress.NONE);
+            return new Proved(file, laid, Optional.of(pack), Optional.of(Intake.of(pack.bundle(),
+                    laid.get().sha256())), Optional.empty());
         } catch (Refused e) {
-            part.ifPresent(shelf::drop);
-            Defect why = part.isPresent() && e.defect().where().equals(part.get().toString())
-                    ? new Defect(e.defect().code(), file.toString(), e.defect().details()) : e.defect();
-            return new Received.Turned(file, why, fingerprint);
+            boolean copied = laid.filter(copy -> e.defect().where().equals(copy.part().toString())).isPresent();
+            return new Proved(file, laid, Optional.empty(), Optional.empty(), Optional.of(copied
+                    ? new Defect(e.defect().code(), file.toString(), e.defect().details()) : e.defect()));
         }
     }
 
-    private Received take(Path file, PackShelf.Laid laid, ReadPack pack, String person) {
+    private Received take(Proved proved, String person) {
+        Optional<String> fingerprint = proved.pack().map(pack -> pack.fingerprint().text());
+        Optional<Defect> defect = proved.defect();
+        if (defect.isEmpty()) {
+            try {
+                return take(proved.file(), proved.laid().orElseThrow(), proved.pack().orElseThrow(),
+                        proved.intake().orElseThrow(), person);
+            } catch (Refused e) {
+                defect = Optional.of(e.defect());
+            } catch (NotSaved e) {
+                defect = Optional.of(e.defect());
+            }
+        }
+        proved.laid().ifPresent(laid -> shelf.drop(laid.part()));
+        return new Received.Turned(proved.file(), defect.get(), fingerprint);
+    }
+
+    private Received take(Path file, PackShelf.Laid laid, ReadPack pack, Intake intake, String person) {
         String fingerprint = pack.fingerprint().text();
         Branch document = pack.bundle().document();
         Branch sender = document.branch("device").orElse(Branch.EMPTY);
@@ -244,7 +282,6 @@ public final class OfficeStore implements AutoCloseable {
         if (!ask(tables -> minutes(tables).trusts(fingerprint))) {
             throw new Refused(Defect.in(shown, "device-untrusted", fingerprint));
         }
-        Intake intake = Intake.of(pack.bundle(), laid.sha256());
         OfficeDeed deed = new OfficeDeed.PackReceived(laid.sha256(), file.getFileName().toString(), laid.bytes(),
                 fingerprint, document.uuid("id"), document.time("createdAt"), sender.uuid("id"), name);
         Set<String> before = ask(tables -> tables.known(digests(intake)));
@@ -325,6 +362,7 @@ public final class OfficeStore implements AutoCloseable {
         try {
             return desk.call(() -> {
                 try {
+                    rows.clear();
                     return books.keep(() -> {
                         if (needless.apply(books.tables())) {
                             return true;
@@ -369,8 +407,18 @@ public final class OfficeStore implements AutoCloseable {
         ZonedDateTime now = ZonedDateTime.now(options.clock());
         return ask(tables -> {
             Minutes known = minutes(tables);
-            return new Ranking(now, query, known::answers).rank(tables.zones());
+            return new Ranking(now, query, known::answers).rank(zones(tables));
         });
+    }
+
+    /** Every zone's row; kept until something changes, where nobody else can change it. */
+    private List<ZoneRow> zones(OfficeTables tables) {
+        List<ZoneRow> kept = rows.get();
+        if (kept == null || books instanceof ServerBooks) {
+            kept = tables.zones();
+            rows = new SoftReference<>(kept);
+        }
+        return kept;
     }
 
     /** A zone as it stands in the list. */
@@ -396,6 +444,7 @@ public final class OfficeStore implements AutoCloseable {
                 latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
                         sides.stream().min(Judge.WORST_FIRST).map(worst -> Judge.verdict(worst.assessment()))));
                 tables.judge(verdicts);
+                rows.clear();
                 return zones.size();
             });
             if (judged == 0) {

@@ -1,6 +1,6 @@
 package bedmark.office;
 
-import bedmark.office.OfficeStore.Proved;
+import bedmark.office.Receiving.Proved;
 import java.nio.file.Path;
 import java.util.ArrayDeque;
 import java.util.ArrayList;

@@ -35,6 +35,7 @@ final class FormPane extends VBox {
     private List<RowPlace> rows = List.of();
     private Optional<RowPlace> inHand = Optional.empty();
     private boolean filling;
+    private boolean upright;
 
     /** @param large whether large keys take the room: one row is shown, and what is said of it stands elsewhere */
     FormPane(ZoneModel model, Wording wording, Listening listening, boolean large) {
@@ -60,6 +61,7 @@ final class FormPane extends VBox {
             VBox.setVgrow(scroll, Priority.ALWAYS);
             getChildren().addAll(header, scroll, caution);
         }
+        sceneProperty().addListener((property, before, now) -> fill());
         listening.to(model.rowsProperty(), this::layOut);
         listening.onChange(model.keptProperty(), kept -> rows.forEach(RowPlace::update));
         listening.onChange(model.typedProperty(), typed -> typed());
@@ -89,6 +91,7 @@ final class FormPane extends VBox {
             }
             RowPlace place = rows.stream().filter(known -> known.row().equals(row)).findFirst()
                     .orElseGet(() -> new RowPlace(row, model, wording, large));
+            place.turned(upright);
             made.add(place);
             lines.add(place);
         }
@@ -108,6 +111,9 @@ final class FormPane extends VBox {
 
     private void fillSome() {
         filling = false;
+        if (getScene() == null || getScene().getWindow() == null || !getScene().getWindow().isShowing()) {
+            return;
+        }
         List<RowPlace> next = rows.stream().filter(row -> !row.isBuilt()).limit(AT_A_TIME).toList();
         next.forEach(row -> {
             row.build();
@@ -117,6 +123,12 @@ final class FormPane extends VBox {
             inHand.ifPresent(this::reveal);
             fill();
         }
+    }
+
+    /** Told when the tablet is turned. */
+    void turned(boolean portrait) {
+        upright = portrait;
+        rows.forEach(row -> row.turned(portrait));
     }
 
     private String title(Section section) {

@@ -62,7 +62,6 @@ final class FormPane extends VBox {
         }
         listening.to(model.rowsProperty(), this::layOut);
         listening.onChange(model.keptProperty(), kept -> rows.forEach(RowPlace::update));
-        listening.onChange(model.surveyProperty(), survey -> typed());
         listening.onChange(model.typedProperty(), typed -> typed());
         listening.onChange(model.noteProperty(), note -> typed());
         listening.onChange(model.beltStateProperty(), state -> sayCaution());
@@ -110,7 +109,10 @@ final class FormPane extends VBox {
     private void fillSome() {
         filling = false;
         List<RowPlace> next = rows.stream().filter(row -> !row.isBuilt()).limit(AT_A_TIME).toList();
-        next.forEach(RowPlace::build);
+        next.forEach(row -> {
+            row.build();
+            row.applyCss();
+        });
         if (!next.isEmpty()) {
             inHand.ifPresent(this::reveal);
             fill();
@@ -162,7 +164,8 @@ final class FormPane extends VBox {
 
     /** Brings the row in sight with the one before it where there is room for both; no row is cut at the top. */
     private void reveal(RowPlace row) {
-        applyCss();
+        // Only this row can have changed its style; styling the whole form anew would cost more than the key's work.
+        row.applyCss();
         layout();
         double room = scroll.getViewportBounds().getHeight();
         double all = list.getBoundsInLocal().getHeight();

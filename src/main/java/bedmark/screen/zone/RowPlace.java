@@ -11,6 +11,8 @@ final class RowPlace extends StackPane {
     private final Wording wording;
     private final boolean quiet;
     private Optional<RowView> view = Optional.empty();
+    private double widthAsked = Double.NaN;
+    private double heightKnown;
 
     /** @param quiet whether what is to be said of the row is said elsewhere */
     RowPlace(SlotRow row, ZoneModel model, Wording wording, boolean quiet) {
@@ -41,6 +43,22 @@ final class RowPlace extends StackPane {
             getChildren().setAll(view.orElseThrow());
         }
         return view.orElseThrow();
+    }
+
+    @Override
+    public void requestLayout() {
+        widthAsked = Double.NaN;
+        super.requestLayout();
+    }
+
+    /** A key changes one row; the list asks all of them how high they are. */
+    @Override
+    protected double computePrefHeight(double width) {
+        if (width != widthAsked) {
+            heightKnown = super.computePrefHeight(width);
+            widthAsked = width;
+        }
+        return heightKnown;
     }
 
     /** Shows what the survey holds now, where the row is built. */

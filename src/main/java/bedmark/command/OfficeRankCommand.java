@@ -90,16 +90,16 @@ final class OfficeRankCommand implements Callable<Integer> {
         List<RankedZone> ranked;
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
-            ranked = store.rank(query, progress::at);
+            ranked = limit.isPresent() ? store.worst(query, limit.get(), progress::at)
+                    : store.rank(query, progress::at);
         }
-        List<RankedZone> shown = ranked.subList(0, Math.min(ranked.size(), limit.orElse(ranked.size())));
         RankText text = new RankText(new Wording(surroundings.words(), system));
         if (output.json) {
-            shown.forEach(zone -> surroundings.out().println(RankText.json(zone)));
+            ranked.forEach(zone -> surroundings.out().println(RankText.json(zone)));
         } else if (output.csv) {
-            surroundings.out().print(RankText.csv(shown));
+            surroundings.out().print(RankText.csv(ranked));
         } else {
-            text.print(shown, surroundings.out());
+            text.print(ranked, surroundings.out());
         }
         surroundings.out().flush();
         return exitCode(ranked);

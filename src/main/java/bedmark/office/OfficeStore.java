@@ -284,6 +284,22 @@ public final class OfficeStore implements AutoCloseable {
         });
     }
 
+    /**
+     * The worst of the zones that a query asks for: the head of {@link #rank(RankQuery, Progress)}, without reading all
+     * of them where enough are overloaded.
+     *
+     * @param atMost how many; at least 1
+     */
+    public List<RankedZone> worst(RankQuery query, int atMost, Progress progress) {
+        judgeWaiting(progress);
+        ZonedDateTime now = ZonedDateTime.now(options.clock());
+        Optional<List<RankedZone>> head = ask(tables -> {
+            Minutes known = minutes(tables);
+            return new Ranking(now, query, known::answers).head(tables, atMost);
+        });
+        return head.orElseGet(() -> rank(query, progress).stream().limit(atMost).toList());
+    }
+
     /** Every zone's row; kept until something changes, where nobody else can change it. */
     private List<ZoneRow> zones(OfficeTables tables) {
         List<ZoneRow> kept = rows.get();

@@ -1,6 +1,7 @@
 package bedmark.office;
 
 import bedmark.engine.verdict.Level;
+import bedmark.index.office.OfficeTables;
 import bedmark.index.office.Verdict;
 import bedmark.index.office.ZoneRow;
 import bedmark.survey.InspectionStatus;
@@ -20,11 +21,14 @@ import java.util.function.Function;
 /** Puts zones in order, worst first: by place, then share of the drive, then saving. */
 final class Ranking {
     private static final Level[] LEVELS = Level.values();
-    private static final Comparator<RankedZone> WORST_FIRST = Comparator.comparing(RankedZone::place)
-            .thenComparing(Comparator.<RankedZone>comparingDouble(zone -> zone.driveShare().orElse(-1)).reversed())
+    /** How many overloaded zones are looked at for each that is wanted, since some were answered or filtered out. */
+    private static final int READ = 2;
+    private static final Comparator<RankedZone> BY_NUMBERS = Comparator
+            .<RankedZone>comparingDouble(zone -> zone.driveShare().orElse(-1)).reversed()
             .thenComparing(Comparator.<RankedZone>comparingDouble(zone ->
-                    zone.saving().map(Saving::wh).orElse(-1.0)).reversed())
-            .thenComparing(RankedZone::zone);
+                    zone.saving().map(Saving::wh).orElse(-1.0)).reversed());
+    private static final Comparator<RankedZone> WORST_FIRST = Comparator.comparing(RankedZone::place)
+            .thenComparing(BY_NUMBERS).thenComparing(RankedZone::zone);
 
     private final Instant now;
     private final LocalDate today;
@@ -41,6 +45,24 @@ final class Ranking {
     List<RankedZone> rank(List<ZoneRow> rows) {
         return rows.stream().filter(row -> row.names().registered() || row.standing().visit().isPresent())
                 .map(this::ranked).filter(query::holds).sorted(WORST_FIRST).toList();
+    }
+
+    /**
+     * The head of the list from overloaded zones alone: what was answered only ever takes one out of them.
+     *
+     * @return nothing where there are too few of them to say
+     */
+    Optional<List<RankedZone>> head(OfficeTables tables, int atMost) {
+        int read = READ * atMost;
+        List<ZoneRow> rows = tables.worst(Level.OVERLOADED.ordinal(), read);
+        List<RankedZone> found = rank(rows).stream().filter(zone -> zone.place() == Place.OVERLOADED).toList();
+        if (found.size() <= atMost) {
+            return Optional.empty();
+        }
+        // Behind the last one that was read may stand others with its very numbers.
+        RankedZone last = found.get(atMost - 1);
+        boolean settled = rows.size() < read || BY_NUMBERS.compare(last, ranked(rows.get(read - 1))) < 0;
+        return settled ? Optional.of(found.subList(0, atMost)) : Optional.empty();
     }
 
     RankedZone ranked(ZoneRow row) {

@@ -54,6 +54,10 @@ class AnyOrderTest {
                     assertTrue(first.keySet().stream().filter(name -> name.startsWith("registers")).count() > 1,
                             "the register changes");
                 }
+                for (int most : new int[] {1, 7, 10_000}) {
+                    assertEquals(store.rank().stream().limit(most).toList(),
+                            store.worst(RankQuery.ALL, most, Progress.NONE));
+                }
                 assertEquals(first, files);
                 assertEquals(ranked, Offices.told(store));
             }

@@ -18,6 +18,9 @@ import bedmark.survey.merge.ZoneId;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Duration;
+import java.time.LocalDate;
+import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
@@ -80,6 +83,31 @@ class OfficeStoreTest {
             assertEquals(InspectionStatus.NOT_ACCESSIBLE, barred.visitStatus().orElseThrow());
             assertTrue(ranked.stream().filter(zone -> zone.place() == Place.WITHIN).allMatch(zone ->
                     zone.visitStatus().equals(Optional.of(InspectionStatus.INSPECTED)) && !zone.stale()));
+        }
+    }
+
+    @Test
+    void theHeadOfTheListIsReadAloneAndIsTheSame() {
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
+            store.receive(packOf("round-2026-03"), "Ida Marsh");
+            for (RankedZone zone : store.rank().subList(0, 2)) {
+                for (FindingLine line : zone.findings()) {
+                    new Findings(store).answer(zone.zone(), line.rule(), OfficeDeed.Answer.ACCEPTED, "known",
+                            "Ida Marsh", Optional.empty(), LocalDate.ofInstant(Offices.NOW.instant(), ZoneOffset.UTC));
+                }
+            }
+            RankedZone some = store.rank().get(3);
+            assertTrue(store.rank().stream().anyMatch(zone -> !zone.answers().isEmpty()));
+            for (RankQuery query : List.of(RankQuery.ALL, RankQuery.ALL.ofArea(Optional.of(some.names().area())),
+                    RankQuery.ALL.ofMaterial(Optional.of(some.names().material())),
+                    RankQuery.ALL.with(Optional.of(some.findings().get(0).rule())),
+                    RankQuery.ALL.olderThan(some.age()), RankQuery.ALL.staleAfter(Duration.ZERO),
+                    RankQuery.ALL.ofPlant(Optional.of("elsewhere")))) {
+                List<RankedZone> all = store.rank(query, Progress.NONE);
+                for (int most = 1; most <= all.size() + 1; most++) {
+                    assertEquals(all.stream().limit(most).toList(), store.worst(query, most, Progress.NONE));
+                }
+            }
         }
     }
 

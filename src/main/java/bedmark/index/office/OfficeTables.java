@@ -23,7 +23,7 @@ import java.util.function.Supplier;
 public final class OfficeTables implements AutoCloseable {
 
     /** The version of the tables: the number of the last migration. */
-    static final String SCHEMA = "1";
+    static final String SCHEMA = "2";
     private static final String DEED = "insert into deed (seq, made_at, person, device, code, payload) "
             + "values (?, ?, ?, ?, ?, ?)";
     private static final String MOVED = "update survey set made = ?, register = ?, conveyor = ?, drive = ? "
@@ -344,6 +344,12 @@ public final class OfficeTables implements AutoCloseable {
     /** Every zone as it stands. */
     public List<ZoneRow> zones() {
         return link.rows("select " + ZoneRow.COLUMNS + " from zone", ZoneRow::read);
+    }
+
+    /** Those zones of a level that load their drives most, then would save most; an index holds them in that order. */
+    public List<ZoneRow> worst(int level, int atMost) {
+        return link.rows("select " + ZoneRow.COLUMNS + " from zone where level = ? order by level, "
+                + "drive_share desc nulls last, saving_wh desc nulls last limit ?", ZoneRow::read, level, atMost);
     }
 
     public Optional<ZoneRow> zone(ZoneId zone) {

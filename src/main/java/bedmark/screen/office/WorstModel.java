@@ -16,6 +16,8 @@ import javafx.collections.ObservableList;
 
 /** The worst-first list and what it is narrowed to. */
 public final class WorstModel {
+    private static final int HEAD = 200;
+
     private final OfficeDesk desk;
     private final ObservableList<RankedZone> zones = FXCollections.observableArrayList();
     private final ReadOnlyObjectWrapper<List<RankedZone>> all = new ReadOnlyObjectWrapper<>(List.of());
@@ -37,13 +39,21 @@ public final class WorstModel {
     public void look() {
         RankQuery query = RankQuery.ALL.ofArea(area.get()).ofMaterial(material.get()).with(finding.get())
                 .olderThan(days.get().map(Duration::ofDays));
+        // What a person sees first does not wait for the rest of a long list.
+        desk.ask(progress -> desk.store().worst(query, HEAD, progress), this::show);
         desk.ask(progress -> {
             List<RankedZone> every = desk.store().rank(RankQuery.ALL, progress);
             return List.of(every, query.equals(RankQuery.ALL) ? every : desk.store().rank(query, progress));
         }, lists -> {
             all.set(lists.get(0));
-            zones.setAll(lists.get(1));
+            show(lists.get(1));
         });
+    }
+
+    private void show(List<RankedZone> list) {
+        if (!zones.equals(list)) {
+            zones.setAll(list);
+        }
     }
 
     public ObservableList<RankedZone> zones() {

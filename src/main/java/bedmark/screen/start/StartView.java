@@ -26,7 +26,6 @@ import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
-import javafx.scene.control.ProgressBar;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
@@ -69,14 +68,15 @@ public final class StartView extends SidedScreen {
         listening.to(workplace.siteProperty(), site -> ask());
         listening.onChange(model.loadingProperty(), share -> ask());
         listening.onChange(model.troubleProperty(), trouble -> ask());
+        listening.onChange(model.taking().outcomeProperty(), outcome -> ask());
     }
 
     private void ask() {
         model.chooseRound();
         questions.getChildren().clear();
         if (!model.hasPlant() || model.loadingProperty().get() >= 0) {
-            offerDemo();
-            questions.getChildren().addAll(choice("screen.start.language", languages()));
+            questions.getChildren().addAll(new FirstStart(workplace, model, navigator),
+                    choice("screen.start.language", languages()));
             return;
         }
         person.setId("person");
@@ -88,9 +88,17 @@ public final class StartView extends SidedScreen {
         }
         Label name = new Label(wording.text("screen.start.person"));
         name.setLabelFor(person);
-        questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()), progress(), limits(),
+        questions.getChildren().addAll(new TakingPane(workplace, model.taking()), name, person);
+        if (model.rounds().isEmpty()) {
+            questions.getChildren().add(wrapped(wording.text("first.no-round")));
+        } else {
+            questions.getChildren().addAll(choice("screen.start.round", rounds()), progress());
+        }
+        ActionButton take = TakingPane.button(workplace, model.taking(), "first.take.again", Weight.QUIET);
+        take.getStyleClass().add("secondary-target");
+        questions.getChildren().addAll(limits(),
                 pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
-                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())));
+                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())), take);
     }
 
     /** How far the chosen round is: in words, and as its strip of ticks. */
@@ -121,27 +129,6 @@ public final class StartView extends SidedScreen {
             HBox.setHgrow(box, Priority.ALWAYS);
         }
         return pair;
-    }
-
-    private void offerDemo() {
-        if (!model.hasPlant()) {
-            questions.getChildren().add(wrapped(wording.text(model.canLoadDemo() ? "screen.start.empty"
-                    : "screen.start.empty-no-demo")));
-        }
-        model.troubleProperty().get().ifPresent(defect ->
-                questions.getChildren().add(wrapped(wording.sentence(defect))));
-        double share = model.loadingProperty().get();
-        if (share >= 0) {
-            ProgressBar bar = new ProgressBar(share);
-            bar.setMaxWidth(Double.MAX_VALUE);
-            questions.getChildren().addAll(wrapped(wording.text("screen.start.loading")), bar);
-        } else if (model.canLoadDemo()) {
-            ActionButton load = new ActionButton(Weight.PRIMARY, wording.text("screen.start.load-demo"),
-                    model::loadDemo);
-            load.setId("load-demo");
-            load.setMaxWidth(Double.MAX_VALUE);
-            questions.getChildren().add(load);
-        }
     }
 
     private ChoiceRow choice(String key, List<ChoiceRow.Option> options) {

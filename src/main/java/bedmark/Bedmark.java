@@ -5,7 +5,10 @@ import bedmark.command.Surroundings;
 import bedmark.index.Store;
 import bedmark.index.StoreFolder;
 import bedmark.index.StoreOptions;
+import bedmark.office.OfficeOptions;
+import bedmark.office.OfficeStore;
 import bedmark.screen.BedmarkApp;
+import bedmark.screen.office.OfficeApp;
 import bedmark.words.Words;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
@@ -40,6 +43,9 @@ public final class Bedmark {
         }
         TOOLKIT.setLevel(Level.SEVERE);
         Clock clock = Clock.systemDefaultZone();
+        if (OfficeStore.isOffice(folder)) {
+            return OfficeApp.open(OfficeStore.open(folder, OfficeOptions.of(clock)), clock);
+        }
         BedmarkApp.prepare();
         StoreOptions options = BedmarkApp.options(clock);
         if (new StoreFolder(folder, options).sealed()) {

@@ -100,7 +100,7 @@ final class OfficeReportCommand implements Callable<Integer> {
                     (zone, sha256) -> store.photo(zone, sha256), "Bedmark " + ProgramVersion.number(),
                     progress::at);
             whole(target -> write(kind, content, options, target));
-            progress.close();
+            progress.done();
             surroundings.out().println(surroundings.words().text("report.written", out, content.zones().size()));
         }
         return ExitCode.FINE;

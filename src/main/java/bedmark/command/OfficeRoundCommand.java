@@ -43,7 +43,7 @@ final class OfficeRoundCommand implements Callable<Integer> {
             String id = plant.or(() -> known.size() == 1 ? Optional.of(known.get(0)) : Optional.empty())
                     .orElseThrow(() -> new Refused(Defect.in("", "plant-unclear", String.join(", ", known))));
             new RoundDesk(store).send(id, rounds, out, OffsetDateTime.now(surroundings.clock()), desk.person());
-            progress.close();
+            progress.done();
             surroundings.out().println(surroundings.words().text("office.round.written", out,
                     store.key().fingerprint()));
         }

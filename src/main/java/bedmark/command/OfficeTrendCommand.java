@@ -5,6 +5,7 @@ import bedmark.office.JudgedZone;
 import bedmark.office.OfficeStore;
 import bedmark.office.trend.TrendDocument;
 import bedmark.office.trend.ZoneTrend;
+import bedmark.report.TrendTelling;
 import bedmark.quantity.UnitSystem;
 import bedmark.survey.merge.ZoneId;
 import bedmark.wording.Wording;
@@ -53,14 +54,14 @@ final class OfficeTrendCommand implements Callable<Integer> {
                 progress)) {
             ZoneId zone = OfficeDesk.zone(store, transfer);
             ZoneTrend trend = store.trend(zone);
-            progress.close();
+            progress.done();
             if (json) {
                 surroundings.out().print(new String(JsonWriter.indented(TrendDocument.of(trend)),
                         StandardCharsets.UTF_8));
             } else {
                 Optional<JudgedZone> own = store.judged(zone);
                 Optional<JudgedZone> today = store.judgedToday(zone);
-                new TrendText(new Wording(surroundings.words(), system)).lines(trend, own, today)
+                new TrendTelling(new Wording(surroundings.words(), system)).lines(trend, own, today)
                         .forEach(line -> surroundings.out().println(line));
             }
             surroundings.out().flush();

@@ -186,11 +186,14 @@ final class Findings {
         return level;
     }
 
-    /** The reading to take again for the first rule which is undecided. */
+    /**
+     * The reading to take again for the first rule which is undecided. What all zones of a conveyor do together may be
+     * undecided where this zone's own part is not known yet: there is nothing to take again then, but to take.
+     */
     Optional<Repeat> repeat() {
         for (Finding finding : judged.values()) {
-            if (finding.level() == Level.UNDECIDED) {
-                Deduced<Uncertain> number = numbers.get(finding.rule());
+            Deduced<Uncertain> number = numbers.get(finding.rule());
+            if (finding.level() == Level.UNDECIDED && number.isKnown()) {
                 return new Repetition(finding, settings.certainty()).of(tape.sensitivities(number.get()));
             }
         }

@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.nio.ByteBuffer;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
@@ -67,7 +68,15 @@ final class PassphraseFile {
 
     /** Makes the two equal again, where one was lost or a change of the passphrase was cut short. */
     void mend(WrappedKey key) throws IOException {
+        for (String name : flawed(key)) {
+            place(key, name);
+        }
+    }
+
+    /** Which of the two does not hold exactly that key. */
+    List<String> flawed(WrappedKey key) throws IOException {
         byte[] text = key.text();
+        List<String> flawed = new ArrayList<>();
         for (String name : List.of(NAME, TWIN)) {
             Path file = folder.resolve(name);
             byte[] there = new byte[0];
@@ -77,9 +86,10 @@ final class PassphraseFile {
                 }
             }
             if (!Arrays.equals(text, there)) {
-                place(key, name);
+                flawed.add(name);
             }
         }
+        return flawed;
     }
 
     /** Takes both away, surely: a store whose sealing failed. */

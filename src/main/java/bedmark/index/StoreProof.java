@@ -16,6 +16,7 @@ import bedmark.json.EntryCodec;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.vault.DataKey;
+import bedmark.vault.WrappedKey;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
@@ -88,6 +89,7 @@ final class StoreProof implements JournalVisitor {
         Path journalFolder = folder.resolve(Ledger.JOURNAL);
         try {
             index.begin(compare);
+            proveKey(folder);
             JournalProof journal = JournalProof.of(journalFolder, files, cover, extent, this);
             journal.tail().ifPresent(defects::add);
             boolean equal = compare && index.end(journal.last());
@@ -140,6 +142,15 @@ final class StoreProof implements JournalVisitor {
         progress.at(done, total);
         if (progress.cancelled()) {
             throw new Refused(Defect.in("", "work-cancelled"));
+        }
+    }
+
+    /** The wrapped key lies there twice; one of the two being damaged is no loss yet. */
+    private void proveKey(Path folder) throws IOException {
+        PassphraseFile file = new PassphraseFile(folder, files);
+        Optional<WrappedKey> wrapped = file.read();
+        if (wrapped.isPresent()) {
+            file.flawed(wrapped.get()).forEach(name -> defects.add(Defect.in(name, "passphrase-twin-damaged")));
         }
     }
 

@@ -130,6 +130,11 @@ public final class OfficeStore implements AutoCloseable {
         return open(folder, Optional.empty(), options, true);
     }
 
+    /** Whether a folder holds an office store. */
+    public static boolean isOffice(Path folder) {
+        return FileLayer.disk().exists(folder.resolve(OFFICE));
+    }
+
     /** Whether a text names a database server rather than a folder. */
     public static boolean isServer(String text) {
         return OfficeTables.isServer(text);
@@ -574,6 +579,11 @@ public final class OfficeStore implements AutoCloseable {
 
     public List<OfficeDeed.ActionSet> actions() {
         return ask(tables -> minutes(tables).actions());
+    }
+
+    /** This office's, or this desk's own folder. */
+    public Path folder() {
+        return folder;
     }
 
     public Device device() {

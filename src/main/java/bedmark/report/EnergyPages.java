@@ -66,8 +66,8 @@ final class EnergyPages {
     private void bar(ConveyorEnergy one, double top, double perWh) {
         Lettering name = Lettering.plain(10).bold();
         Lettering area = Lettering.plain(7.6).soft();
-        flow.leaf().mutter(name(one), name, flow.left(), top + 11);
-        flow.leaf().mutter(flow.broken(one.area(), area, NAMES - 6).get(0), area, flow.left(), top + 21);
+        flow.leaf().mutter(flow.fitting(name(one), name, NAMES - 6), name, flow.left(), top + 11);
+        flow.leaf().mutter(flow.fitting(one.area(), area, NAMES - 6), area, flow.left(), top + 21);
         double x = flow.left() + NAMES;
         double wide = one.wh() * perWh;
         double saved = Math.min(wide, one.savingWh() * perWh);

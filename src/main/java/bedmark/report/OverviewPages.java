@@ -146,7 +146,7 @@ final class OverviewPages {
                         .action()).map(action -> words.text("report.do", zone.tag(), action)).stream())
                 .limit(ACTIONS).toList();
         List<String> shown = new ArrayList<>();
-        double height = head.leading() + 10;
+        double height = head.leading() + 13;
         for (String action : actions) {
             height += flow.broken(action, text, flow.width()).size() * text.leading() + 2;
             if (height + caution() < flow.room()) {
@@ -158,6 +158,7 @@ final class OverviewPages {
         }
         flow.down(8);
         flow.paragraph("H2", words.text("report.do-first"), head);
+        flow.down(3);
         flow.booklet().tags().within("L", () -> shown.forEach(action -> {
             flow.booklet().tags().within("LI", () -> flow.paragraph("LBody", action, text));
             flow.down(2);

@@ -14,11 +14,11 @@ final class RankGrid {
 
     static void set(Flow flow, ReportWords words, List<ReportZone> zones) {
         boolean severalPlants = zones.stream().map(zone -> zone.ranked().names().plant()).distinct().count() > 1;
-        new Grid(flow, List.of(Grid.Column.text(words.text("report.column.zone"), 25),
-                Grid.Column.text(words.text("report.column.verdict"), 22),
-                Grid.Column.text(words.text("report.column.why"), 36),
-                Grid.Column.number(words.text("report.column.share"), 11),
-                Grid.Column.number(words.text("report.column.saving"), 14)), 8.8)
+        new Grid(flow, List.of(Grid.Column.text(words.text("report.column.zone"), 24),
+                Grid.Column.text(words.text("report.column.verdict"), 20),
+                Grid.Column.text(words.text("report.column.why"), 42),
+                Grid.Column.number(words.text("report.column.share"), 9),
+                Grid.Column.number(words.text("report.column.saving"), 13)), 8.8)
                 .set(zones.stream().map(zone -> row(words, zone, severalPlants)).toList());
     }
 

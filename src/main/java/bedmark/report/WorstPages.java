@@ -15,6 +15,8 @@ import bedmark.wording.Told;
 import bedmark.wording.ZoneSketcher;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /** The worst zones, two to a page: the verdict, the zone picture, a photo, the numbers that count, what helps. */
 final class WorstPages {
@@ -25,7 +27,7 @@ final class WorstPages {
     private static final double PICTURE_SCALE = 0.95;
     private static final double HEADING = 30;
     /** What a card takes beside its picture. */
-    private static final double TEXTS = 178;
+    private static final double TEXTS = 158;
     private static final double BESIDE = 12;
 
     private final ReportContent content;
@@ -76,17 +78,20 @@ final class WorstPages {
         head(number, zone, examined);
         Telling telling = new Telling(words.wording(), examined.form());
         Told told = telling.tell(examined.assessment());
-        verdict(zone, told);
+        boolean atDesign = told.atDesign().isPresent() && examined.assessment().levelAtDesignFeed()
+                .filter(level -> level.compareTo(examined.assessment().level()) > 0).isPresent();
+        verdict(zone, atDesign ? words.text("report.verdict", words.place(zone.ranked().place()), words.why(zone))
+                : told.sentence());
         flow.down(6);
         picture(zone, examined);
         flow.down(8);
         figures(told);
         told.action().ifPresent(action -> flow.paragraph("P", action, Lettering.plain(9.5).bold()));
-        String rest = String.join(" ", List.of(told.sure().map(sure -> sure + "."), told.atDesign(), told.repeat()).stream().flatMap(Optional::stream)
-                .toList());
-        if (!rest.isEmpty()) {
-            flow.paragraph("P", rest, Lettering.plain(9).soft());
-        }
+        String sure = told.sure().map(text -> " (" + text + ")").orElse("");
+        String now = atDesign ? words.text("report.today", told.sentence() + sure)
+                : Stream.of(told.sure(), told.atDesign()).flatMap(Optional::stream).collect(Collectors.joining(" · "));
+        Stream.of(now, told.repeat().orElse("")).filter(text -> !text.isEmpty())
+                .forEach(text -> flow.paragraph("P", text, Lettering.plain(9).soft()));
         flow.down(14);
     }
 
@@ -95,24 +100,26 @@ final class WorstPages {
         Lettering soft = Lettering.plain(9.5).soft();
         String who = words.examined(zone) + examined.survey().inspector().map(name -> " · " + name).orElse("");
         double baseline = flow.y() + tag.rise();
+        String by = flow.fitting(who, soft, flow.width() / 3);
+        double room = flow.width() - flow.measured(by, soft) - 12;
+        String name = flow.fitting(number + " · " + zone.tag(), tag, room);
+        String way = flow.fitting(zone.way() + examined.assessor().material(examined.survey())
+                .map(material -> " · " + material.name()).orElse(""), soft, room - flow.measured(name, tag) - 8);
         flow.booklet().tags().within("H3", () -> {
-            String name = number + " · " + zone.tag();
             flow.leaf().write(name, tag, flow.left(), baseline);
-            flow.leaf().write(" " + zone.way() + examined.assessor().material(examined.survey())
-                            .map(material -> " · " + material.name()).orElse(""), soft,
-                    flow.left() + flow.measured(name, tag) + 4, baseline);
+            flow.leaf().write(" " + way, soft, flow.left() + flow.measured(name, tag) + 4, baseline);
         });
-        flow.booklet().tags().within("P", () -> flow.leaf().write(who, soft,
-                flow.left() + flow.width() - flow.measured(who, soft), baseline));
+        flow.booklet().tags().within("P", () -> flow.leaf().write(by, soft,
+                flow.left() + flow.width() - flow.measured(by, soft), baseline));
         flow.down(tag.leading() + 3);
     }
 
-    private void verdict(ReportZone zone, Told told) {
+    private void verdict(ReportZone zone, String sentence) {
         boolean over = zone.ranked().place() == Place.OVERLOADED;
         LevelSign sign = new LevelSign(zone.ranked().place(), 18);
         sign.draw(flow.leaf(), flow.left(), flow.y());
         double left = flow.left() + sign.width() + 4;
-        flow.paragraph("P", told.sentence(), Lettering.plain(11.5).bold().in(over ? Ink.OVER : Ink.INK), left,
+        flow.paragraph("P", sentence, Lettering.plain(11.5).bold().in(over ? Ink.OVER : Ink.INK), left,
                 flow.width() - sign.width() - 4);
     }
 

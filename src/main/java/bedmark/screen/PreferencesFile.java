@@ -9,17 +9,18 @@ import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 
 /** Keeps preferences beside the store. They are a convenience: losing them loses no survey and stops nothing. */
-final class PreferencesFile {
+public final class PreferencesFile {
     private static final String NAME = "preferences.json";
 
     private final Path file;
 
-    PreferencesFile(Path store) {
+    /** @param store the store's folder */
+    public PreferencesFile(Path store) {
         this.file = store.resolve(NAME);
     }
 
     /** What was kept; a file that is missing or damaged is as good as none. */
-    Preferences read() {
+    public Preferences read() {
         try {
             return Files.exists(file) ? Preferences.of(JsonReader.read(Files.readAllBytes(file)).root())
                     : Preferences.standard();
@@ -29,7 +30,7 @@ final class PreferencesFile {
     }
 
     /** Keeps them; returns whether that went well. */
-    boolean write(Preferences preferences) {
+    public boolean write(Preferences preferences) {
         Path next = file.resolveSibling(NAME + ".next");
         try {
             Files.write(next, JsonWriter.indented(preferences.document()));

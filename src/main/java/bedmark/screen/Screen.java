@@ -22,4 +22,9 @@ public interface Screen {
     /** Told when the screen leaves the stage: what was typed is saved, and nothing listens on. */
     default void left() {
     }
+
+    /** Told when the same work is shown anew in other words or another light: what is being typed goes on. */
+    default void replaced() {
+        left();
+    }
 }

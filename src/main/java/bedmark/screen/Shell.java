@@ -139,7 +139,9 @@ public final class Shell implements Navigator {
     }
 
     private void show(Supplier<Screen> next) {
-        if (screen != null) {
+        if (screen != null && next == current) {
+            screen.replaced();
+        } else if (screen != null) {
             screen.left();
         }
         current = next;

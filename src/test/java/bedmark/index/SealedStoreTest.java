@@ -260,6 +260,8 @@ class SealedStoreTest {
         byte[] whole = Files.readAllBytes(folder.resolve(PassphraseFile.NAME));
         for (String name : List.of(PassphraseFile.NAME, PassphraseFile.TWIN)) {
             Files.write(folder.resolve(name), Arrays.copyOf(whole, 90));
+            StoreCheck check = Store.check(folder, new QuickLayer(), Optional.of(SECRET), Progress.NONE);
+            assertEquals(List.of(new Defect("passphrase-twin-damaged", name, List.of())), check.defects());
             Store.open(folder, quick(true)).close();
             assertArrayEquals(whole, Files.readAllBytes(folder.resolve(name)));
             Files.delete(folder.resolve(name));

@@ -82,7 +82,7 @@ final class PostgresServer implements AutoCloseable {
         up();
     }
 
-    private void tool(String name, String... arguments) throws Exception {
+    private void tool(String name, String... arguments) throws IOException {
         List<String> command = new ArrayList<>();
         if (root()) {
             command.addAll(List.of("setpriv", "--reuid=" + NOBODY, "--regid=" + NOBODY, "--clear-groups"));
@@ -95,20 +95,24 @@ final class PostgresServer implements AutoCloseable {
     private static boolean runs(String... command) {
         try {
             return run(command) == 0;
-        } catch (IOException | InterruptedException e) {
+        } catch (IOException e) {
             return false;
         }
     }
 
-    private static int run(String... command) throws IOException, InterruptedException {
+    private static int run(String... command) throws IOException {
         Process process = new ProcessBuilder(command).redirectOutput(ProcessBuilder.Redirect.DISCARD)
                 .redirectError(ProcessBuilder.Redirect.DISCARD).start();
-        assertEquals(true, process.waitFor(120, TimeUnit.SECONDS));
+        try {
+            assertEquals(true, process.waitFor(120, TimeUnit.SECONDS));
+        } catch (InterruptedException e) {
+            throw new IOException(e);
+        }
         return process.exitValue();
     }
 
     @Override
-    public void close() throws Exception {
+    public void close() throws IOException {
         tool("pg_ctl", "-D", data(), "-w", "-m", "immediate", "stop");
         try (Stream<Path> files = Files.walk(home)) {
             for (Path file : files.sorted(Comparator.reverseOrder()).toList()) {

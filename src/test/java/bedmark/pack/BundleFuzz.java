@@ -8,6 +8,7 @@ import bedmark.json.JsonWriter;
 import bedmark.survey.Assessor;
 import bedmark.survey.Bundle;
 import bedmark.survey.Survey;
+import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
 import java.util.List;
 
@@ -17,6 +18,11 @@ import java.util.List;
  */
 public final class BundleFuzz {
     private BundleFuzz() {
+    }
+
+    /** Loads what the first input needs, which is no part of its time. */
+    public static void fuzzerInitialize() {
+        fuzzerTestOneInput(HostilePacks.bundle(BagForge.PHOTO).getBytes(StandardCharsets.UTF_8));
     }
 
     /** The name and form that fuzzers look for. */

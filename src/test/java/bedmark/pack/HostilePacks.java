@@ -60,7 +60,8 @@ final class HostilePacks {
         return bag;
     }
 
-    private static String bundle(byte[] photo) {
+    /** A small bundle that the schema lets in. */
+    static String bundle(byte[] photo) {
         return ("{'format':'bedmark.bundle','version':1,'id':'11111111-1111-4111-8111-111111111111',"
                 + "'createdAt':'2026-03-01T08:30:00+01:00','device':{'id':'22222222-2222-4222-8222-222222222222',"
                 + "'name':'tablet 7'},'plant':{'id':'p','name':'Demo','conveyors':[{'id':'c','beltWidth':{'value':1200,"

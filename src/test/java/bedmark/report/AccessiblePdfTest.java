@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.office.OfficeStore;
 import bedmark.quantity.UnitSystem;
 import bedmark.report.paper.PaperSize;
+import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
@@ -31,6 +32,12 @@ import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.verapdf.gf.foundry.VeraGreenfieldFoundryProvider;
+import org.verapdf.pdfa.Foundries;
+import org.verapdf.pdfa.PDFAParser;
+import org.verapdf.pdfa.flavours.PDFAFlavour;
+import org.verapdf.pdfa.results.TestAssertion;
+import org.verapdf.pdfa.results.ValidationResult;
 
 /** What a screen reader and an archive need of the report (after ISO 14289-1), found again in the written file. */
 class AccessiblePdfTest {
@@ -39,19 +46,37 @@ class AccessiblePdfTest {
 
     @TempDir
     static Path folder;
+    private static byte[] written;
     private static PDDocument document;
 
     @BeforeAll
     static void write() throws IOException {
         try (OfficeStore store = Reports.demo(folder)) {
-            document = Loader.loadPDF(Reports.pdf(Reports.content(store), Reports.options(Reports.SPANISH,
-                    UnitSystem.METRIC, PaperSize.A4, Reports.photos(store))));
+            written = Reports.pdf(Reports.content(store), Reports.options(Reports.SPANISH, UnitSystem.METRIC,
+                    PaperSize.A4, Reports.photos(store)));
+            document = Loader.loadPDF(written);
         }
     }
 
     @AfterAll
     static void close() throws IOException {
         document.close();
+    }
+
+    /** The rules of ISO 14289-1 (PDF/UA-1) that a machine can check, by their reference validator. */
+    @Test
+    void theValidatorFindsNothingAgainstTheStandard() throws Exception {
+        VeraGreenfieldFoundryProvider.initialise();
+        try (PDFAParser parser = Foundries.defaultInstance().createParser(new ByteArrayInputStream(written),
+                PDFAFlavour.PDFUA_1)) {
+            ValidationResult result = Foundries.defaultInstance().createValidator(PDFAFlavour.PDFUA_1, false)
+                    .validate(parser);
+            assertTrue(result.getTotalAssertions() > 10_000);
+            assertEquals(List.of(), result.getTestAssertions().stream()
+                    .filter(one -> one.getStatus() == TestAssertion.Status.FAILED)
+                    .map(one -> one.getRuleId().getClause() + " " + one.getMessage()).distinct().toList());
+            assertTrue(result.isCompliant());
+        }
     }
 
     private static List<COSDictionary> elements() {

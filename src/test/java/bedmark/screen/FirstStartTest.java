@@ -171,12 +171,12 @@ class FirstStartTest {
             scan("office-asked", "landscape");
             app.click("accept-office");
             app.until(() -> app.has("person"));
-            assertTrue(app.words("taken").startsWith("It is in, without a round"), app.words("taken"));
+            assertTrue(app.words("taken").startsWith("Taken in: no round"), app.words("taken"));
             scan("no-round", "landscape");
             Files.delete(temp.resolve("stick/a.round.json"));
             roundFile("b", "2026-09-21T08:00:00Z", true);
             app.click("take-round");
-            app.until(() -> app.words("taken").startsWith("It is in: one round"));
+            app.until(() -> app.words("taken").startsWith("Taken in: one round"));
             assertFalse(app.has("accept-office"), "the office is known");
             start();
             app.until(() -> app.has("stop-TP-01"));

@@ -84,7 +84,7 @@ public final class Glass {
     }
 
     /** Writes what a scene shows into a file. */
-    static void write(Path file, Scene scene) throws IOException {
+    public static void write(Path file, Scene scene) throws IOException {
         write(file, scene, 1);
     }
 

@@ -4,19 +4,26 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import bedmark.document.Branch;
+import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.engine.Assessment;
 import bedmark.engine.Conventions;
 import bedmark.engine.LoadingZone;
 import bedmark.engine.Result;
 import bedmark.engine.Settings;
+import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Rule;
+import bedmark.quantity.Quantity;
+import bedmark.quantity.Unit;
 import bedmark.survey.Assessor.AssessedConveyor;
 import bedmark.survey.Assessor.Judged;
+import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.Set;
+import java.util.UUID;
 import org.junit.jupiter.api.Test;
 
 class AssessorTest {
@@ -76,6 +83,25 @@ class AssessorTest {
         Assessment beside = ASSESSOR.assess(ONE, List.of(impossible));
         assertTrue(beside.findings().stream().noneMatch(found -> found.rule() == Rule.SKIRTS_OVER_BUDGET));
         assertThrows(Refused.class, () -> ASSESSOR.assess(Plants.survey("t9", ""), List.of()));
+    }
+
+    /** The skirts of both zones stand at the budget, give or take; the zone without readings has no part in it yet. */
+    @Test
+    void aZoneWithoutReadingsIsIncompleteWhereItsConveyorIsUndecided() {
+        Survey read = Plants.survey("t1", "");
+        Survey empty = new Survey(read.document().with("id", UUID.randomUUID().toString()).with("transfer", "t2")
+                .with("readings", Branch.EMPTY));
+        double power = new Assessor(Plants.register("")).assess(read, List.of()).get(Result.DRIVE_POWER).orElseThrow()
+                .value();
+        Branch plant = Plants.register("").document();
+        List<Node> conveyors = plant.branches("conveyors").stream().map(conveyor -> (Node) conveyor.with(
+                "skirtPowerBudget", Quantity.of(BigDecimal.valueOf(power), Unit.WATT))).toList();
+        Assessor assessor = new Assessor(new Register(plant.with("conveyors", new Node.Series(conveyors))));
+        assertEquals(Level.UNDECIDED, assessor.assess(read, List.of(empty)).level());
+        Assessment found = assessor.assess(empty, List.of(read));
+        assertEquals(Level.UNDECIDED, found.findings().stream().filter(finding ->
+                finding.rule() == Rule.SKIRTS_OVER_BUDGET).findFirst().orElseThrow().level());
+        assertEquals(Optional.empty(), found.repeat());
     }
 
     @Test

@@ -17,9 +17,8 @@ public final class RegisterTables {
     /** The tables by file name; empty lists have none. */
     public static Map<String, String> of(Branch head) {
         Map<String, String> files = new LinkedHashMap<>();
-        Branch plant = head.branch("plant").orElse(Branch.EMPTY);
         Column.LISTS.forEach((list, columns) -> {
-            List<Branch> rows = rows(head, plant, list);
+            List<Branch> rows = rows(head, list);
             if (!rows.isEmpty()) {
                 StringBuilder text = new StringBuilder(Csv.row(columns.stream().map(Column::key).toList()));
                 rows.forEach(row -> text.append(Csv.row(columns.stream().map(column -> cell(row, column.key()))
@@ -30,7 +29,9 @@ public final class RegisterTables {
         return files;
     }
 
-    private static List<Branch> rows(Branch head, Branch plant, String list) {
+    /** The rows of a list. */
+    static List<Branch> rows(Branch head, String list) {
+        Branch plant = head.branch("plant").orElse(Branch.EMPTY);
         List<Branch> rows = new ArrayList<>();
         if (list.equals(Column.ROUNDS)) {
             for (Branch round : head.branches("rounds")) {
@@ -53,7 +54,8 @@ public final class RegisterTables {
         return rows;
     }
 
-    private static String cell(Branch row, String key) {
+    /** A cell as text, a quantity with its unit. */
+    static String cell(Branch row, String key) {
         return row.get(key).map(node -> {
             if (node instanceof Branch quantity) {
                 return quantity.asQuantity().value().toPlainString() + " " + quantity.asQuantity().unit().code();

@@ -113,7 +113,7 @@ public final class Faces implements TextMeasure {
         while (end > 0 && width(text.substring(0, end) + "…", lettering.face(), lettering.size()) > room) {
             end = text.offsetByCodePoints(end, -1);
         }
-        return text.substring(0, end).stripTrailing() + "…";
+        return end == 0 ? "" : text.substring(0, end).stripTrailing() + "…";
     }
 
     @Override

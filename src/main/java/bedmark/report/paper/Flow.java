@@ -141,6 +141,11 @@ public final class Flow {
         return word.substring(0, end);
     }
 
+    /** As much of a text as fits, with an ellipsis where it is cut; nothing where there is no room for that. */
+    public String fitting(String text, Lettering lettering, double width) {
+        return booklet.faces().fitting(text, lettering, width);
+    }
+
     /** The width of a text (pt). */
     public double measured(String text, Lettering lettering) {
         return booklet.faces().width(text, lettering.face(), lettering.size());

@@ -8,6 +8,7 @@ import java.util.List;
 public final class Grid {
     private static final double PAD = 3.2;
     private static final double BETWEEN = 9;
+    private static final int MOST_LINES = 8;
 
     private final Flow flow;
     private final List<Column> columns;
@@ -171,11 +172,20 @@ public final class Grid {
     private List<Line> lines(Cell cell, double room) {
         Lettering style = cell.strong() ? lettering.in(cell.ink()).bold() : lettering.in(cell.ink());
         List<Line> lines = new ArrayList<>();
-        flow.broken(cell.text(), style, room).forEach(text -> lines.add(new Line(text, style)));
+        add(cell.text(), style, room, lines);
         if (!cell.below().isEmpty()) {
-            flow.broken(cell.below(), head, room).forEach(text -> lines.add(new Line(text, head)));
+            add(cell.below(), head, room, lines);
         }
         return lines;
+    }
+
+    /** A text of many lines is cut, so that a row never outgrows a page. */
+    private void add(String text, Lettering style, double room, List<Line> lines) {
+        List<String> broken = flow.broken(text, style, room);
+        for (int i = 0; i < Math.min(MOST_LINES, broken.size()); i++) {
+            boolean cut = i == MOST_LINES - 1 && broken.size() > MOST_LINES;
+            lines.add(new Line(cut ? flow.fitting(broken.get(i) + " …", style, room) : broken.get(i), style));
+        }
     }
 
     private void cell(Sign sign, List<Line> lines, Column column, double x, boolean rowHead) {

@@ -34,6 +34,10 @@ final class CameraFolder {
         this.folder = folder;
     }
 
+    boolean isAt(Path path) {
+        return folder.equals(path);
+    }
+
     /**
      * The newest photos that have come to rest, newest first.
      *

@@ -32,6 +32,7 @@ public final class CameraModel {
     private final ReadOnlyObjectWrapper<List<Path>> shots = new ReadOnlyObjectWrapper<>(List.of());
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final Map<CameraFolder.Shot, String> digests = new HashMap<>();
+    private Optional<CameraFolder> watched = Optional.empty();
     private Optional<ScheduledExecutorService> watch = Optional.empty();
 
     /** @param attached the digests of the photos that are on the survey, hexadecimal; asked on the screen */
@@ -54,7 +55,9 @@ public final class CameraModel {
     public void watch() {
         leave();
         workplace.preferences().watchedFolder().map(Path::of).ifPresent(path -> {
-            CameraFolder folder = new CameraFolder(path);
+            // Shown anew, the screen goes on from what was seen before.
+            CameraFolder folder = watched.filter(known -> known.isAt(path)).orElseGet(() -> new CameraFolder(path));
+            watched = Optional.of(folder);
             ScheduledExecutorService eye = Executors.newSingleThreadScheduledExecutor(run -> {
                 Thread thread = new Thread(run, "camera-folder");
                 thread.setDaemon(true);

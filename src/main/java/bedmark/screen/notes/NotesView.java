@@ -4,6 +4,7 @@ import bedmark.screen.Heads;
 import bedmark.screen.Navigator;
 import bedmark.screen.SidedScreen;
 import bedmark.screen.Workplace;
+import bedmark.screen.pad.NumericPad;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.CautionStrip;
 import bedmark.screen.part.FootBar;
@@ -165,7 +166,7 @@ public final class NotesView extends SidedScreen {
     }
 
     private void write(OptionalInt place, PlannedAction action) {
-        ActionEditor editor = new ActionEditor(wording, action, model.today(), photos::showKeys, written -> {
+        ActionEditor editor = new ActionEditor(wording, action, model.today(), this::showKeys, written -> {
             unfinished = Optional.empty();
             written.ifPresent(done -> model.put(place, done));
             showList();
@@ -179,6 +180,16 @@ public final class NotesView extends SidedScreen {
         scroll.setMinHeight(0);
         body.setCenter(work);
         editor.begin();
+    }
+
+    /** Shows the pad, and what it types into, which is the end of the editor. */
+    private void showKeys(Optional<NumericPad> keys) {
+        photos.showKeys(keys);
+        keys.ifPresent(pad -> {
+            body.applyCss();
+            body.layout();
+            scroll.setVvalue(1);
+        });
     }
 
     /** Puts an editor in the place of the list. */

@@ -43,6 +43,7 @@ final class PhotoTile extends StackPane {
         button.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
         button.setId(id);
         button.setAccessibleText(name);
+        setAlignment(Pos.TOP_LEFT);
         getChildren().add(button);
     }
 

@@ -72,6 +72,8 @@ final class SealBoxes extends VBox {
         }
         message.managedProperty().bind(message.textProperty().isNotEmpty());
         getChildren().addAll(row, message);
+        // A size to order has no history of its own.
+        Optional.ofNullable(keys.lookup("#pad-history")).ifPresent(key -> key.setVisible(false));
         PadKeyboard.listen(this, pad);
         show();
     }

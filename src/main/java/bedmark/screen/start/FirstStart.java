@@ -7,6 +7,7 @@ import bedmark.screen.part.Labels;
 import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.ProgressBar;
 import javafx.scene.layout.VBox;
@@ -15,7 +16,8 @@ import javafx.scene.layout.VBox;
 final class FirstStart extends VBox {
     private final Wording wording;
 
-    FirstStart(Workplace workplace, StartModel model, Navigator navigator) {
+    /** @param office takes the office's round in */
+    FirstStart(Workplace workplace, StartModel model, Navigator navigator, RoundTakingPane office) {
         wording = workplace.wording();
         getStyleClass().add("questions-inside");
         model.troubleProperty().get().ifPresent(defect -> getChildren().add(Texts.trouble(wording.sentence(defect))));
@@ -28,9 +30,7 @@ final class FirstStart extends VBox {
         }
         Label title = Texts.wrapped(wording.text("first.title"));
         title.getStyleClass().add("card-title");
-        getChildren().addAll(title, new TakingPane(workplace, model.taking()),
-                way("first.take.title", "first.take.words", TakingPane.button(workplace, model.taking(), "first.take",
-                        Weight.PLAIN)));
+        getChildren().addAll(title, way("first.take.title", "first.take.words", office));
         if (NewPlantModel.offered(workplace)) {
             getChildren().add(way("first.new.title", "first.new.words",
                     button("new-plant", "first.new", navigator::toNewPlant)));
@@ -48,9 +48,9 @@ final class FirstStart extends VBox {
         return button;
     }
 
-    private VBox way(String title, String words, ActionButton button) {
+    private VBox way(String title, String words, Node what) {
         VBox way = new VBox(Labels.wrapped("rule-name", wording.text(title)), Texts.wrapped(wording.text(words)),
-                button);
+                what);
         way.getStyleClass().add("question");
         return way;
     }

@@ -45,6 +45,7 @@ public final class StartView extends SidedScreen {
     private final VBox questions = new VBox();
     private final ScrollPane scroll = new ScrollPane(questions);
     private final TextField person = new TextField();
+    private final RoundTakingPane office;
 
     public StartView(Workplace workplace, StartModel model, Navigator navigator) {
         super("safety-card");
@@ -58,6 +59,7 @@ public final class StartView extends SidedScreen {
         settings.getStyleClass().add("secondary-target");
         frame(Heads.head(workplace, listening, wording.text("screen.name"), wording.text("screen.start.title"),
                 settings), footBar());
+        office = new RoundTakingPane(workplace, model.taking(), listening);
         questions.getStyleClass().add("questions");
         side.getStyleClass().add("safety-card");
         scroll.setFitToWidth(true);
@@ -68,14 +70,13 @@ public final class StartView extends SidedScreen {
         listening.to(workplace.siteProperty(), site -> ask());
         listening.onChange(model.loadingProperty(), share -> ask());
         listening.onChange(model.troubleProperty(), trouble -> ask());
-        listening.onChange(model.taking().outcomeProperty(), outcome -> ask());
     }
 
     private void ask() {
         model.chooseRound();
         questions.getChildren().clear();
         if (!model.hasPlant() || model.loadingProperty().get() >= 0) {
-            questions.getChildren().addAll(new FirstStart(workplace, model, navigator),
+            questions.getChildren().addAll(new FirstStart(workplace, model, navigator, office),
                     choice("screen.start.language", languages()));
             return;
         }
@@ -88,17 +89,15 @@ public final class StartView extends SidedScreen {
         }
         Label name = new Label(wording.text("screen.start.person"));
         name.setLabelFor(person);
-        questions.getChildren().addAll(new TakingPane(workplace, model.taking()), name, person);
+        questions.getChildren().addAll(name, person);
         if (model.rounds().isEmpty()) {
             questions.getChildren().add(wrapped(wording.text("first.no-round")));
         } else {
             questions.getChildren().addAll(choice("screen.start.round", rounds()), progress());
         }
-        ActionButton take = TakingPane.button(workplace, model.taking(), "first.take.again", Weight.QUIET);
-        take.getStyleClass().add("secondary-target");
         questions.getChildren().addAll(limits(),
                 pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
-                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())), take);
+                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())), office);
     }
 
     /** How far the chosen round is: in words, and as its strip of ticks. */

@@ -14,7 +14,8 @@ import javafx.scene.Scene;
 /** Dresses a scene: typeface, colours of the light, sizes of the density. */
 public final class Theme {
     /** The sheets that hold the look, in their order; lengths in them are those of the glass. */
-    static final List<String> SHEETS = List.of("theme.css", "parts.css", "controls.css", "screens.css", "walk.css");
+    static final List<String> SHEETS = List.of("theme.css", "parts.css", "controls.css", "screens.css", "walk.css",
+            "office.css");
 
     private Theme() {
     }

@@ -263,8 +263,13 @@ public final class ZoneView implements Screen {
 
     @Override
     public void left() {
-        history.hide();
         model.keep();
+        replaced();
+    }
+
+    @Override
+    public void replaced() {
+        history.hide();
         listening.end();
     }
 }

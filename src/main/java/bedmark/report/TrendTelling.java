@@ -1,4 +1,4 @@
-package bedmark.command;
+package bedmark.report;
 
 import bedmark.engine.verdict.Level;
 import bedmark.office.JudgedZone;
@@ -15,17 +15,23 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
-/** A zone over time in words. */
-final class TrendText {
+/** A zone over time in words, in one person's language and units. */
+public final class TrendTelling {
     private static final double DAYS_A_YEAR = 365.25;
 
     private final Wording wording;
 
-    TrendText(Wording wording) {
+    public TrendTelling(Wording wording) {
         this.wording = wording;
     }
 
-    List<String> lines(ZoneTrend trend, Optional<JudgedZone> own, Optional<JudgedZone> today) {
+    /**
+     * Everything, a line each.
+     *
+     * @param own   the latest result by the register that it was made with
+     * @param today the same by today's
+     */
+    public List<String> lines(ZoneTrend trend, Optional<JudgedZone> own, Optional<JudgedZone> today) {
         List<String> lines = new ArrayList<>();
         for (Series series : trend.series()) {
             say(lines, "", "office.trend." + series.measure().code());
@@ -38,6 +44,20 @@ final class TrendText {
                     value(series.measure(), limit)));
             outlook(lines, series);
         }
+        lines.addAll(around(trend, own, today));
+        return lines;
+    }
+
+    /** What one measure comes to. */
+    public List<String> outlook(Series series) {
+        List<String> lines = new ArrayList<>();
+        outlook(lines, series);
+        return lines.stream().map(String::strip).toList();
+    }
+
+    /** What changed, how often to look, and how the latest result is judged. */
+    public List<String> around(ZoneTrend trend, Optional<JudgedZone> own, Optional<JudgedZone> today) {
+        List<String> lines = new ArrayList<>();
         trend.changes().forEach(change -> say(lines, "", "office.trend.change." + change.kind().code(),
                 change.at().atZone(ZoneOffset.UTC).toLocalDate(), change.from(), change.to()));
         say(lines, "", "office.interval." + trend.interval().reason().code(), trend.interval().days(),
@@ -78,7 +98,8 @@ final class TrendText {
                 .orElse(wording.text("office.trend.open")));
     }
 
-    private String value(Measure measure, double si) {
+    /** A value of a measure with its unit. */
+    public String value(Measure measure, double si) {
         return switch (measure) {
             case DEPTH -> wording.computed(si, wording.units().smallLength());
             case DRAG -> wording.computed(si, wording.units().unit(Dimension.FORCE));

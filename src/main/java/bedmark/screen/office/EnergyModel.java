@@ -1,0 +1,37 @@
+package bedmark.screen.office;
+
+import bedmark.office.PlantEnergy;
+import bedmark.office.RankQuery;
+import bedmark.office.RankedZone;
+import java.util.List;
+import javafx.beans.property.BooleanProperty;
+import javafx.beans.property.SimpleBooleanProperty;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableList;
+
+/** What the skirts take in a year, by conveyor or by area. */
+public final class EnergyModel {
+    private final ObservableList<PlantEnergy.Bar> bars = FXCollections.observableArrayList();
+    private final BooleanProperty byArea = new SimpleBooleanProperty();
+    private List<RankedZone> zones = List.of();
+
+    EnergyModel(OfficeDesk desk) {
+        byArea.addListener((property, before, now) -> show());
+        desk.ask(progress -> desk.store().rank(RankQuery.ALL, progress), ranked -> {
+            zones = ranked;
+            show();
+        });
+    }
+
+    private void show() {
+        bars.setAll(byArea.get() ? PlantEnergy.byArea(zones) : PlantEnergy.byConveyor(zones));
+    }
+
+    public ObservableList<PlantEnergy.Bar> bars() {
+        return bars;
+    }
+
+    public BooleanProperty byAreaProperty() {
+        return byArea;
+    }
+}

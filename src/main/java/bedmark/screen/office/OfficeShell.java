@@ -1,0 +1,194 @@
+package bedmark.screen.office;
+
+import bedmark.screen.Listening;
+import bedmark.screen.Preferences;
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.Texts;
+import bedmark.screen.part.TopBar;
+import bedmark.screen.part.Weight;
+import bedmark.screen.theme.Density;
+import bedmark.screen.theme.Hand;
+import bedmark.screen.theme.Icon;
+import bedmark.screen.theme.Light;
+import bedmark.screen.theme.Theme;
+import bedmark.survey.merge.ZoneId;
+import bedmark.wording.Wording;
+import java.util.Locale;
+import javafx.application.Platform;
+import javafx.scene.Node;
+import javafx.scene.Scene;
+import javafx.scene.control.Label;
+import javafx.scene.control.ProgressBar;
+import javafx.scene.control.TextField;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.control.ToggleGroup;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+
+/** The one window of the office: its rooms in a row at the top, below them the one that is open. */
+public final class OfficeShell {
+
+    /** The rooms. */
+    public enum Room {
+        WORST("worst"), RECEIVE("receive"), ENERGY("energy"), REGISTER("register");
+
+        private final String code;
+
+        Room(String code) {
+            this.code = code;
+        }
+    }
+
+    private final OfficeDesk desk;
+    private final BorderPane root = new BorderPane();
+    private final Scene scene;
+    private final Listening listening = new Listening();
+    private final ReceiveModel receive;
+    private final WorstModel worst;
+    private Room room = Room.WORST;
+    private Listening shown = new Listening();
+
+    /** A window of that size; the worst zones are shown first. */
+    public OfficeShell(OfficeDesk desk, double width, double height) {
+        this.desk = desk;
+        this.receive = new ReceiveModel(desk);
+        this.worst = new WorstModel(desk);
+        this.scene = new Scene(root, width, height);
+        root.getStyleClass().add("office");
+        dress();
+        desk.preferencesProperty().addListener((property, before, now) -> {
+            if (!before.withPerson("").equals(now.withPerson(""))) {
+                dress();
+                open(room);
+            }
+        });
+        open(Room.WORST);
+    }
+
+    public Scene scene() {
+        return scene;
+    }
+
+    private void dress() {
+        Preferences preferences = desk.preferences();
+        Theme.apply(scene, preferences.night() ? Light.NIGHT : Light.DAY,
+                new Density(preferences.dpi(), Hand.BARE));
+    }
+
+    /** Opens a room. */
+    public void open(Room next) {
+        room = next;
+        show(switch (next) {
+            case WORST -> new WorstView(desk, worst, begin(), this::zone);
+            case RECEIVE -> new ReceiveView(desk, receive, begin());
+            case ENERGY -> new EnergyView(desk, new EnergyModel(desk), begin());
+            case REGISTER -> new RegisterView(desk, new RegisterModel(desk), begin());
+        });
+    }
+
+    /** Opens one zone. */
+    public void zone(ZoneId zone) {
+        room = Room.WORST;
+        show(new ZoneStoryView(desk, new ZoneStoryModel(desk, zone), begin(), () -> open(Room.WORST)));
+    }
+
+    private Listening begin() {
+        shown.end();
+        shown = new Listening();
+        return shown;
+    }
+
+    private void show(Node content) {
+        root.setTop(head());
+        root.setCenter(content);
+        // The name at the top would take the first keys.
+        Platform.runLater(content::requestFocus);
+    }
+
+    private Node head() {
+        Wording wording = desk.wording();
+        boolean night = desk.preferences().night();
+        ActionButton light = ActionButton.of(night ? Icon.SUN : Icon.MOON, Weight.PLAIN,
+                wording.text(night ? "screen.start.light.day" : "screen.start.light.night"), () ->
+                        desk.preferencesProperty().set(desk.preferences().withNight(!night)));
+        light.setId("light");
+        String language = desk.preferences().locale().getLanguage();
+        ActionButton words = new ActionButton(Weight.PLAIN, language.equals("es") ? "English" : "Español", () ->
+                desk.preferencesProperty().set(desk.preferences().withLocale(
+                        Locale.forLanguageTag(language.equals("es") ? "en" : "es"))));
+        words.setId("language");
+        TextField person = new TextField(desk.person());
+        person.setId("person");
+        person.setPromptText(wording.text("office.person"));
+        person.setAccessibleText(wording.text("office.person"));
+        person.textProperty().addListener((property, before, now) ->
+                desk.preferencesProperty().set(desk.preferences().withPerson(now.strip())));
+        HBox more = new HBox(person, words, light);
+        more.getStyleClass().add("more");
+        TopBar bar = new TopBar(more);
+        bar.titleProperty().set(wording.text("screen.name"));
+        bar.subtitleProperty().set(wording.text("office.title"));
+        return new VBox(bar, rooms(wording), progress(wording), trouble(wording));
+    }
+
+    private Node rooms(Wording wording) {
+        HBox tabs = new HBox();
+        tabs.getStyleClass().add("rooms");
+        ToggleGroup group = new ToggleGroup();
+        for (Room one : Room.values()) {
+            ToggleButton tab = new ToggleButton(wording.text("office.room." + one.code));
+            tab.setId("room-" + one.code);
+            tab.setToggleGroup(group);
+            tab.setSelected(one == room);
+            tab.setMaxWidth(Double.MAX_VALUE);
+            tab.setPrefWidth(100);
+            tab.setOnAction(event -> open(one));
+            HBox.setHgrow(tab, Priority.ALWAYS);
+            tabs.getChildren().add(tab);
+        }
+        return tabs;
+    }
+
+    private Node progress(Wording wording) {
+        ProgressBar bar = new ProgressBar();
+        bar.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(bar, Priority.ALWAYS);
+        ActionButton cancel = new ActionButton(Weight.PLAIN, wording.text("office.cancel"), desk::cancel);
+        cancel.setId("cancel");
+        HBox box = new HBox(bar, cancel);
+        box.getStyleClass().add("work");
+        box.managedProperty().bind(box.visibleProperty());
+        shown.to(desk.progressProperty(), share -> {
+            // Work that is done at once would only flicker.
+            box.setVisible(share.doubleValue() > 0);
+            bar.setProgress(share.doubleValue());
+        });
+        return box;
+    }
+
+    private Node trouble(Wording wording) {
+        Label words = Texts.trouble("");
+        words.setMaxWidth(Double.MAX_VALUE);
+        HBox box = new HBox(words);
+        HBox.setHgrow(words, Priority.ALWAYS);
+        box.getStyleClass().add("trouble");
+        box.setMinHeight(Region.USE_PREF_SIZE);
+        box.managedProperty().bind(box.visibleProperty());
+        shown.to(desk.troubleProperty(), defect -> {
+            box.setVisible(defect.isPresent());
+            words.setText(defect.map(wording::sentence).orElse(""));
+        });
+        return box;
+    }
+
+    /** Lets go of the screen and closes the store. */
+    public void close() {
+        shown.end();
+        listening.end();
+        receive.close();
+        desk.close();
+    }
+}

@@ -1,0 +1,107 @@
+package bedmark.screen.office;
+
+import bedmark.document.Refused;
+import bedmark.journal.Progress;
+import bedmark.office.PackFolder;
+import bedmark.office.Received;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.Executors;
+import java.util.concurrent.ScheduledExecutorService;
+import java.util.concurrent.TimeUnit;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableList;
+
+/** Takes packs in that are dropped, chosen or put into a watched folder, and tells what came of each. */
+public final class ReceiveModel {
+    private static final int LOOK_EVERY_SECONDS = 2;
+
+    private final OfficeDesk desk;
+    private final ObservableList<Received> received = FXCollections.observableArrayList();
+    private final ReadOnlyObjectWrapper<Optional<Path>> watched = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final ScheduledExecutorService watch = Executors.newSingleThreadScheduledExecutor(run -> {
+        Thread thread = new Thread(run, "office-watch");
+        thread.setDaemon(true);
+        return thread;
+    });
+    private volatile Optional<PackFolder> folder = Optional.empty();
+
+    ReceiveModel(OfficeDesk desk) {
+        this.desk = desk;
+        watch.scheduleWithFixedDelay(this::look, LOOK_EVERY_SECONDS, LOOK_EVERY_SECONDS, TimeUnit.SECONDS);
+    }
+
+    /** What came, the newest first. */
+    public ObservableList<Received> received() {
+        return received;
+    }
+
+    public ReadOnlyObjectProperty<Optional<Path>> watchedProperty() {
+        return watched.getReadOnlyProperty();
+    }
+
+    /** Watches a folder from now on; nothing ends the watch. */
+    public void watch(Optional<Path> chosen) {
+        folder = chosen.map(PackFolder::new);
+        watched.set(chosen);
+    }
+
+    /** Looks into the watched folder once; it is looked at by itself every few seconds. */
+    void look() {
+        try {
+            List<Path> whole = folder.map(PackFolder::look).orElse(List.of());
+            if (!whole.isEmpty()) {
+                desk.onScreen(() -> desk.change(progress -> take(whole, progress), this::show));
+            }
+        } catch (Refused e) {
+            // The folder is gone; it may come back, and is looked for again.
+            return;
+        }
+    }
+
+    /** Takes packs in, and those that lie in folders. */
+    public void receive(List<Path> given) {
+        desk.change(progress -> {
+            List<Path> files = new ArrayList<>();
+            given.forEach(one -> files.addAll(Files.isDirectory(one) ? PackFolder.packs(one) : List.of(one)));
+            return take(files, progress);
+        }, this::show);
+    }
+
+    /** The person compared the fingerprint: the device is trusted, and its pack received. */
+    public void trust(Received.Turned turned) {
+        desk.change(progress -> {
+            desk.store().trust(turned.fingerprint().orElseThrow(), "", desk.person());
+            return take(List.of(turned.file()), progress);
+        }, came -> {
+            received.remove(turned);
+            show(came);
+        });
+    }
+
+    private List<Received> take(List<Path> files, Progress progress) {
+        List<Received> came = desk.store().receive(files, desk.person(), progress);
+        came.forEach(one -> one.confirmed().ifPresent(receipt -> {
+            try {
+                desk.store().write(receipt, one.file().toAbsolutePath().getParent());
+            } catch (Refused e) {
+                // The pack is in; the same pack received again writes its receipt again.
+                return;
+            }
+        }));
+        return came;
+    }
+
+    private void show(List<Received> came) {
+        came.forEach(one -> received.add(0, one));
+    }
+
+    void close() {
+        watch.shutdownNow();
+    }
+}

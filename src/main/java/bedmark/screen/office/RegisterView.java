@@ -1,0 +1,154 @@
+package bedmark.screen.office;
+
+import bedmark.office.register.Draft;
+import bedmark.office.register.RegisterGrid;
+import bedmark.screen.Listening;
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.Texts;
+import bedmark.screen.part.Weight;
+import bedmark.wording.Wording;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Consumer;
+import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.scene.Node;
+import javafx.scene.control.ComboBox;
+import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.TableColumn;
+import javafx.scene.control.TableView;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.control.cell.TextFieldTableCell;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.VBox;
+
+/** The register: its lists as tables whose cells are edited in place, import with its mapping, export, next round. */
+final class RegisterView extends VBox {
+    private final OfficeDesk desk;
+    private final RegisterModel model;
+    private final Wording wording;
+    private final BorderPane middle = new BorderPane();
+
+    RegisterView(OfficeDesk desk, RegisterModel model, Listening listening) {
+        this.desk = desk;
+        this.model = model;
+        this.wording = desk.wording();
+        getStyleClass().add("room");
+        FlowPane lists = new FlowPane();
+        lists.getStyleClass().add("filters");
+        VBox.setVgrow(middle, Priority.ALWAYS);
+        Label written = Texts.wrapped("");
+        written.getStyleClass().add("soft");
+        listening.to(model.writtenProperty(), path -> {
+            written.setText(path.map(one -> wording.text("office.register.saved", one)).orElse(""));
+            written.setManaged(path.isPresent());
+        });
+        getChildren().addAll(lists, buttons(), written, middle);
+        listening.to(model.gridProperty(), grid -> {
+            lists.getChildren().setAll(lists());
+            show();
+        });
+        listening.onChange(model.draftProperty(), draft -> show());
+    }
+
+    private List<Node> lists() {
+        ArrayList<Node> nodes = new ArrayList<>();
+        if (model.plants().size() > 1) {
+            ComboBox<String> plants = new ComboBox<>();
+            plants.getItems().setAll(model.plants());
+            plants.setValue(model.plantProperty().get().orElse(null));
+            plants.setAccessibleText(wording.text("office.register.plant"));
+            plants.valueProperty().addListener((property, before, now) -> model.plantProperty().set(Optional.of(now)));
+            nodes.add(plants);
+        }
+        for (String list : RegisterGrid.lists()) {
+            ToggleButton button = new ToggleButton(wording.text("office.list." + list));
+            button.setId("list-" + list);
+            button.setSelected(list.equals(model.listProperty().get()));
+            button.setOnAction(event -> model.listProperty().set(list));
+            nodes.add(button);
+        }
+        return nodes;
+    }
+
+    private Node buttons() {
+        FlowPane buttons = new FlowPane(button("import", "office.register.import", model::read),
+                button("export", "office.register.export", model::write),
+                button("send-round", "office.register.send", model::send));
+        buttons.getStyleClass().add("buttons");
+        return buttons;
+    }
+
+    private ActionButton button(String id, String key, Consumer<Path> action) {
+        ActionButton button = new ActionButton(Weight.PLAIN, wording.text(key), () ->
+                desk.folders().choose(wording.text(key), Optional.empty()).ifPresent(action));
+        button.setId(id);
+        return button;
+    }
+
+    private void show() {
+        middle.setCenter(model.draftProperty().get().map(this::draft).or(() -> model.gridProperty().get()
+                .map(this::table)).orElse(new Label(wording.text("office.register.none"))));
+    }
+
+    private Node table(RegisterGrid grid) {
+        TableView<List<String>> table = new TableView<>();
+        table.setId("register-table");
+        table.setEditable(true);
+        for (int i = 0; i < grid.keys().size(); i++) {
+            table.getColumns().add(column(grid, i));
+        }
+        table.getItems().setAll(grid.rows());
+        table.setPlaceholder(new Label(wording.text("office.register.empty")));
+        return table;
+    }
+
+    private TableColumn<List<String>, String> column(RegisterGrid grid, int index) {
+        String key = grid.keys().get(index);
+        TableColumn<List<String>, String> column = new TableColumn<>(wording.words().has("office.key." + key)
+                ? wording.text("office.key." + key) : key);
+        column.setId("column-" + key);
+        column.setSortable(false);
+        column.setReorderable(false);
+        column.setEditable(index > 0);
+        column.setPrefWidth(index == 0 ? 90 : 140);
+        column.setCellValueFactory(cell -> new ReadOnlyStringWrapper(cell.getValue().get(index)));
+        column.setCellFactory(TextFieldTableCell.forTableColumn());
+        column.setOnEditCommit(event -> model.edit(event.getTablePosition().getRow(), key, event.getNewValue()));
+        return column;
+    }
+
+    private Node draft(Draft draft) {
+        VBox box = new VBox();
+        box.getStyleClass().add("section");
+        box.getChildren().add(Texts.wrapped(wording.text(draft.sound() ? "office.import.would"
+                : "office.register.unsound", draft.sound() ? draft.added() : draft.defects().size(), draft.changed(),
+                draft.same())));
+        FlowPane decide = new FlowPane();
+        decide.getStyleClass().add("buttons");
+        if (draft.sound()) {
+            ActionButton take = new ActionButton(Weight.PRIMARY, wording.text("office.register.take"), model::take);
+            take.setId("take-draft");
+            decide.getChildren().add(take);
+        }
+        ActionButton leave = new ActionButton(Weight.PLAIN, wording.text("office.register.leave"), model::leave);
+        leave.setId("leave-draft");
+        decide.getChildren().add(leave);
+        box.getChildren().add(decide);
+        draft.defects().forEach(defect -> box.getChildren().add(Texts.trouble(wording.sentence(defect))));
+        draft.mapping().forEach(column -> {
+            Label line = Texts.wrapped(wording.text(column.key().isEmpty() ? "office.import.unused"
+                    : "office.import.column", column.source(), column.head(), column.list(), column.key(),
+                    column.unit()));
+            line.getStyleClass().add("soft");
+            box.getChildren().add(line);
+        });
+        ScrollPane scroll = new ScrollPane(box);
+        scroll.setFitToWidth(true);
+        return scroll;
+    }
+}

@@ -1,0 +1,242 @@
+package bedmark.screen.office;
+
+import bedmark.engine.verdict.Level;
+import bedmark.office.Answered;
+import bedmark.office.FindingLine;
+import bedmark.office.JudgedZone;
+import bedmark.office.trend.Measure;
+import bedmark.office.trend.Series;
+import bedmark.report.TrendTelling;
+import bedmark.screen.Listening;
+import bedmark.screen.office.ZoneStoryModel.Story;
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.Texts;
+import bedmark.screen.part.Weight;
+import bedmark.screen.theme.Icon;
+import bedmark.screen.theme.LevelGlyph;
+import bedmark.survey.OfficeDeed;
+import bedmark.survey.merge.Clash;
+import bedmark.survey.merge.Copy;
+import bedmark.wording.Wording;
+import java.time.Instant;
+import java.time.LocalDate;
+import java.time.ZoneOffset;
+import java.util.Optional;
+import javafx.geometry.Pos;
+import javafx.scene.Node;
+import javafx.scene.control.ContentDisplay;
+import javafx.scene.control.DatePicker;
+import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.TextField;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.VBox;
+
+/** One loading zone in the office: its story as a chart, its findings, its actions, its conflicts. */
+final class ZoneStoryView extends ScrollPane {
+    private final ZoneStoryModel model;
+    private final Wording wording;
+    private final TrendTelling telling;
+    private final Runnable back;
+    private final VBox content = new VBox();
+    private final TextField reason = new TextField();
+    private final DatePicker until = new DatePicker();
+    private Measure measure = Measure.DEPTH;
+
+    ZoneStoryView(OfficeDesk desk, ZoneStoryModel model, Listening listening, Runnable back) {
+        this.model = model;
+        this.wording = desk.wording();
+        this.telling = new TrendTelling(wording);
+        this.back = back;
+        content.getStyleClass().add("room");
+        setContent(content);
+        setFitToWidth(true);
+        reason.setId("reason");
+        until.setId("until");
+        listening.to(model.storyProperty(), story -> show());
+    }
+
+    private void show() {
+        content.getChildren().clear();
+        model.storyProperty().get().ifPresent(story -> content.getChildren().addAll(head(story), chart(story),
+                findings(story), actions(story)));
+        model.storyProperty().get().filter(story -> !story.clashes().isEmpty()).ifPresent(story ->
+                content.getChildren().add(clashes(story)));
+    }
+
+    private Node head(Story story) {
+        ActionButton list = ActionButton.with(Icon.BACK, ContentDisplay.LEFT, Weight.PLAIN,
+                wording.text("office.story.back"), back);
+        list.setId("back");
+        Label name = new Label(story.ranked().names().tag() + "  ›  " + story.ranked().names().conveyorTag());
+        name.getStyleClass().add("story-name");
+        Label place = new Label(wording.text("office.place." + story.ranked().place().code()));
+        place.getStyleClass().add("zone-name");
+        Label levels = Texts.wrapped(wording.text("office.trend.judged", level(story.own()), level(story.today())));
+        levels.getStyleClass().add("soft");
+        VBox words = new VBox(name, place, levels);
+        words.setMinWidth(0);
+        HBox.setHgrow(words, Priority.ALWAYS);
+        HBox head = new HBox(new LevelGlyph(ZoneCell.shape(story.ranked().place())), words, list);
+        head.getStyleClass().add("zone-row");
+        head.setAlignment(Pos.CENTER_LEFT);
+        return head;
+    }
+
+    private String level(Optional<JudgedZone> judged) {
+        return judged.map(one -> one.assessment().level()).map(Level::code)
+                .map(code -> wording.text("verdict.level." + code)).orElse("–");
+    }
+
+    private Node chart(Story story) {
+        FlowPane measures = new FlowPane();
+        measures.getStyleClass().add("filters");
+        VBox box = section("office.story.trend", measures);
+        Optional<Series> shown = story.trend().series().stream().filter(one -> one.measure() == measure).findFirst()
+                .or(() -> story.trend().series().stream().findFirst());
+        for (Series series : story.trend().series()) {
+            ToggleButton button = new ToggleButton(wording.text("office.measure." + series.measure().code()));
+            button.setId("measure-" + series.measure().code());
+            button.setSelected(shown.filter(series::equals).isPresent());
+            button.setOnAction(event -> {
+                measure = series.measure();
+                show();
+            });
+            measures.getChildren().add(button);
+        }
+        shown.ifPresentOrElse(series -> {
+            box.getChildren().add(new TrendChart(series, story.trend().changes(), value ->
+                    telling.value(series.measure(), value)));
+            telling.outlook(series).forEach(line -> box.getChildren().add(Texts.wrapped(line)));
+        }, () -> box.getChildren().add(Texts.wrapped(wording.text("office.worst.never"))));
+        telling.around(story.trend(), Optional.empty(), Optional.empty()).forEach(line -> {
+            Label label = Texts.wrapped(line);
+            label.getStyleClass().add("soft");
+            box.getChildren().add(label);
+        });
+        return box;
+    }
+
+    private VBox section(String key, Node... nodes) {
+        Label title = new Label(wording.text(key));
+        title.getStyleClass().add("section-title");
+        VBox box = new VBox(title);
+        box.getStyleClass().add("section");
+        box.getChildren().addAll(nodes);
+        return box;
+    }
+
+    private Node findings(Story story) {
+        VBox box = section("office.story.findings");
+        if (story.ranked().findings().isEmpty()) {
+            box.getChildren().add(Texts.wrapped(wording.text("office.story.no-findings")));
+            return box;
+        }
+        reason.setPromptText(wording.text("office.story.reason"));
+        reason.setAccessibleText(wording.text("office.story.reason"));
+        HBox.setHgrow(reason, Priority.ALWAYS);
+        until.setPromptText(wording.text("office.story.until"));
+        until.setAccessibleText(wording.text("office.story.until"));
+        HBox decision = new HBox(reason, until);
+        decision.getStyleClass().add("decision");
+        box.getChildren().add(decision);
+        for (FindingLine line : story.ranked().findings()) {
+            box.getChildren().add(finding(story, line));
+        }
+        return box;
+    }
+
+    private Node finding(Story story, FindingLine line) {
+        Optional<Answered> answered = story.ranked().answers().stream().filter(one -> one.rule() == line.rule())
+                .findFirst();
+        String words = wording.text("rule." + line.rule().code()) + ": "
+                + wording.text("verdict.level." + line.level().code());
+        VBox text = new VBox(Texts.wrapped(words));
+        answered.ifPresent(one -> text.getChildren().add(Texts.wrapped(wording.text("office.story.answer."
+                + one.answer().code(), one.person(), one.until().map(LocalDate::toString).orElse("–"),
+                one.reason()))));
+        text.setMinWidth(0);
+        text.setAlignment(Pos.CENTER_LEFT);
+        HBox.setHgrow(text, Priority.ALWAYS);
+        HBox row = new HBox(text);
+        row.getStyleClass().add("finding-row");
+        row.setAlignment(Pos.CENTER_LEFT);
+        if (answered.isPresent()) {
+            row.getChildren().add(button("reopen-" + line.rule().code(), "office.story.reopen", () ->
+                    model.reopen(line.rule(), reason.getText())));
+        } else {
+            row.getChildren().addAll(
+                    button("accept-" + line.rule().code(), "office.story.accept", () -> model.answer(line.rule(),
+                            OfficeDeed.Answer.ACCEPTED, reason.getText(), Optional.ofNullable(until.getValue()))),
+                    button("shelve-" + line.rule().code(), "office.story.shelve", () -> model.answer(line.rule(),
+                            OfficeDeed.Answer.SHELVED, reason.getText(), Optional.ofNullable(until.getValue()))));
+        }
+        return row;
+    }
+
+    private ActionButton button(String id, String key, Runnable action) {
+        ActionButton button = new ActionButton(Weight.PLAIN, wording.text(key), action);
+        button.setId(id);
+        return button;
+    }
+
+    private Node actions(Story story) {
+        VBox box = section("office.story.actions");
+        for (OfficeDeed.ActionSet action : story.actions()) {
+            Label words = Texts.wrapped(wording.text("office.story.action", action.text(), action.owner().isBlank()
+                    ? "–" : action.owner(), action.due().map(LocalDate::toString).orElse("–"),
+                    action.workOrder().isBlank() ? "–" : action.workOrder()));
+            words.setMinWidth(0);
+            words.setMaxWidth(Double.MAX_VALUE);
+            HBox.setHgrow(words, Priority.ALWAYS);
+            HBox row = new HBox(words, button("done-" + action.action(), "office.story.done", () ->
+                    model.done(action)));
+            row.getStyleClass().add("finding-row");
+            row.setAlignment(Pos.CENTER_LEFT);
+            box.getChildren().add(row);
+        }
+        TextField text = field("action-text", "office.story.what");
+        TextField owner = field("action-owner", "office.story.owner");
+        TextField order = field("action-order", "office.story.order");
+        DatePicker due = new DatePicker();
+        due.setId("action-due");
+        due.setPromptText(wording.text("office.story.due"));
+        due.setAccessibleText(wording.text("office.story.due"));
+        FlowPane form = new FlowPane(text, owner, due, order, button("action-add", "office.story.add", () ->
+                model.act(text.getText(), owner.getText(), Optional.ofNullable(due.getValue()), order.getText())));
+        form.getStyleClass().add("action-form");
+        box.getChildren().add(form);
+        return box;
+    }
+
+    private TextField field(String id, String key) {
+        TextField field = new TextField();
+        field.setId(id);
+        field.setPromptText(wording.text(key));
+        field.setAccessibleText(wording.text(key));
+        return field;
+    }
+
+    private Node clashes(Story story) {
+        VBox box = section("office.story.clashes");
+        TextField why = field("clash-reason", "office.story.reason");
+        box.getChildren().add(why);
+        for (Clash clash : story.clashes()) {
+            FlowPane sides = new FlowPane();
+            sides.getStyleClass().add("sides");
+            for (Copy side : clash.sides()) {
+                VBox card = new VBox(Texts.wrapped(wording.text("office.story.side", side.revision(),
+                        Instant.ofEpochMilli(side.moment()).atZone(ZoneOffset.UTC).toLocalDate(),
+                        side.digest().substring(0, 12))), button("settle-" + side.digest().substring(0, 12),
+                        "office.story.counts", () -> model.settle(side.digest(), why.getText())));
+                card.getStyleClass().add("side-card");
+                sides.getChildren().add(card);
+            }
+            box.getChildren().add(sides);
+        }
+        return box;
+    }
+}

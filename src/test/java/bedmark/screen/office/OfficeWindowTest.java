@@ -1,0 +1,187 @@
+package bedmark.screen.office;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.document.Branch;
+import bedmark.office.Offices;
+import bedmark.office.RankedZone;
+import bedmark.screen.Glass;
+import bedmark.survey.Bundle;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
+import java.util.stream.Stream;
+import javafx.scene.control.ListView;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** The office's screens, driven by clicks and keys on a headless glass. */
+class OfficeWindowTest {
+    @TempDir
+    private Path folder;
+
+    private Path packs;
+
+    @BeforeEach
+    void packs() {
+        packs = folder.resolve("packs");
+        for (String sample : List.of("round-2025-09", "round-2026-03", "round-under-way")) {
+            Offices.pack(Offices.sample(sample), folder.resolve("tablet"), packs.resolve(sample + ".zip"));
+        }
+    }
+
+    private OfficeWindow window(double width, double height) throws Exception {
+        return new OfficeWindow(folder.resolve("office"), width, height);
+    }
+
+    private void receiveAll(OfficeWindow window) throws Exception {
+        window.desk().store().trust(Offices.fingerprint(folder.resolve("tablet")), "", "Ida Marsh");
+        window.click("room-receive");
+        window.chooses(packs);
+        window.click("receive-folder");
+    }
+
+    @Test
+    void packsOfAnUnknownTabletAreAskedAboutOnceThenReceivedWithReceipts() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            window.click("room-receive");
+            window.chooses(packs);
+            window.click("receive-folder");
+            assertTrue(window.words().contains("does not trust yet"), window.words());
+            window.click("trust");
+            window.click("receive-folder");
+            assertEquals(3, window.desk().store().packs().size());
+            assertTrue(window.words().contains("25 new surveys"), window.words());
+            try (Stream<Path> files = Files.list(packs)) {
+                assertEquals(3, files.filter(file -> file.toString().endsWith(".receipt.json")).count());
+            }
+        }
+    }
+
+    @Test
+    void aWatchedFolderIsReceivedOncePacksAreWhole() throws Exception {
+        Path inbox = Files.createDirectories(folder.resolve("inbox"));
+        try (OfficeWindow window = window(1280, 800)) {
+            window.desk().store().trust(Offices.fingerprint(folder.resolve("tablet")), "", "Ida Marsh");
+            window.click("room-receive");
+            window.chooses(inbox);
+            window.click("watch-folder");
+            Files.copy(packs.resolve("round-2026-03.zip"), inbox.resolve("a.zip"));
+            window.until(() -> window.words().contains("25 new surveys"));
+            assertEquals(1, window.desk().store().packs().size());
+        }
+    }
+
+    @Test
+    void theWorstZoneIsOpenedAndItsFindingAccepted() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            window.click("room-worst");
+            ListView<?> list = (ListView<?>) window.node("zones");
+            window.until(() -> list.getItems().size() == 24);
+            RankedZone worst = (RankedZone) list.getItems().get(0);
+            Glass.on(() -> {
+                window.shell().zone(worst.zone());
+                return null;
+            });
+            window.until(() -> window.words().contains("Too few surveys to say"));
+            String rule = worst.findings().get(0).rule().code();
+            window.click("accept-" + rule);
+            assertTrue(window.words().contains("needs a reason"), window.words());
+            window.click("reason");
+            window.type("boards are on order");
+            window.click("accept-" + rule);
+            assertTrue(window.words().contains("Accepted by Ida Marsh"), window.words());
+            window.click("action-text");
+            window.type("Set the boards wider");
+            window.click("action-add");
+            assertEquals("Set the boards wider", window.desk().store().actions().get(0).text());
+            window.click("back");
+            assertFalse(window.desk().store().ranked(worst.zone()).orElseThrow().answers().isEmpty());
+        }
+    }
+
+    @Test
+    void aConflictIsShownSideBySideAndDecided() throws Exception {
+        Bundle bundle = Offices.sample("round-under-way");
+        Branch survey = bundle.document().branches("surveys").stream().filter(one -> one.text("transfer").get()
+                .equals("TP-08")).findFirst().orElseThrow().with("notes", "told otherwise").without("photos");
+        Offices.pack(Offices.with(bundle, "other", "2026-09-22T17:00:00+02:00", List.of(survey)),
+                folder.resolve("tablet"), packs.resolve("z.zip"));
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            RankedZone zone = window.desk().store().rank().stream().filter(one -> one.clashes() > 0).findFirst()
+                    .orElseThrow();
+            Glass.on(() -> {
+                window.shell().zone(zone.zone());
+                return null;
+            });
+            window.until(() -> window.words().contains("This one counts"));
+            window.click("clash-reason");
+            window.type("the first was signed off");
+            window.click("settle-" + window.desk().store().merged(zone.zone()).clashes().get(0).sides().get(0)
+                    .digest().substring(0, 12));
+            assertEquals(0, window.desk().store().ranked(zone.zone()).orElseThrow().clashes());
+        }
+    }
+
+    @Test
+    void aCellOfTheRegisterIsEditedInPlaceAndABadOneRefused() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            window.click("room-register");
+            window.node("register-table");
+            window.chooses(Files.createDirectories(folder.resolve("out")));
+            window.click("export");
+            assertTrue(Files.readString(folder.resolve("out/conveyors.csv")).startsWith("id,tag,assetId"));
+            Files.writeString(folder.resolve("out/transfers.csv"), "id,conveyor,skirtSpacing\nTP-01,C1,never\n");
+            window.click("import");
+            window.until(() -> window.words().contains("is no number"));
+            window.click("leave-draft");
+            Files.writeString(folder.resolve("out/transfers.csv"), "id,conveyor,skirtSpacing\nTP-01,C1,870 mm\n");
+            window.click("import");
+            window.click("take-draft");
+            assertEquals("870", window.desk().store().registers().get("ostermere").transfer("TP-01").orElseThrow()
+                    .quantity("skirtSpacing").orElseThrow().value().toPlainString());
+            window.click("send-round");
+            try (Stream<Path> files = Files.list(folder.resolve("out"))) {
+                assertEquals(1, files.filter(file -> file.toString().endsWith(".round.json")).count());
+            }
+        }
+    }
+
+    @Test
+    void everyScreenIsDrawnInBothShapesLightsAndLanguages() throws Exception {
+        for (double[] size : List.of(new double[] {1280, 800}, new double[] {800, 1280})) {
+            String shape = size[0] > size[1] ? "landscape" : "portrait";
+            try (OfficeWindow window = window(size[0], size[1])) {
+                receiveAll(window);
+                for (String look : List.of("day-en", "night-es")) {
+                    Glass.on(() -> {
+                        window.desk().preferencesProperty().set(window.desk().preferences()
+                                .withNight(look.startsWith("night"))
+                                .withLocale(Locale.forLanguageTag(look.substring(look.length() - 2))));
+                        return null;
+                    });
+                    for (OfficeShell.Room room : OfficeShell.Room.values()) {
+                        Glass.on(() -> {
+                            window.shell().open(room);
+                            return null;
+                        });
+                        window.picture("office-" + room.name().toLowerCase(Locale.ROOT) + "-" + shape + "-" + look);
+                    }
+                    Glass.on(() -> {
+                        window.shell().zone(window.desk().store().rank().get(0).zone());
+                        return null;
+                    });
+                    window.picture("office-zone-" + shape + "-" + look);
+                }
+            }
+        }
+        assertTrue(Files.exists(Path.of("target/pictures/office-zone-portrait-night-es.png")));
+    }
+}

@@ -25,12 +25,13 @@ import java.util.UUID;
 import java.util.stream.Stream;
 
 /**
- * How an office grows with its plants, each with a tablet of its own that sends a round of all its zones: what it takes
+ * How an office grows with its plants, each with tablets of its own that send a round of all its zones: what it takes
  * to receive, to rank, to export for analysis, and on disk. The steps are powers of ten up to
- * {@code -Dbench.growth.plants}.
+ * {@code -Dbench.growth.plants}, with {@code -Dbench.growth.tablets} at each plant.
  */
 final class PlantGrowthSuite implements Suite {
     private static final int PLANTS = Integer.getInteger("bench.growth.plants", 100);
+    private static final int TABLETS = Integer.getInteger("bench.growth.tablets", 1);
 
     /** What one size of office cost. */
     private record Step(int plants, int surveys, double received, double ranked, double exported, double heap,
@@ -54,8 +55,8 @@ final class PlantGrowthSuite implements Suite {
         Step before = steps.get(0);
         for (Step step : steps) {
             double more = (double) step.plants() / before.plants();
-            String of = String.format(Locale.ROOT, "office of %d plants and tablets, %,d surveys: ", step.plants(),
-                    step.surveys());
+            String of = String.format(Locale.ROOT, "office of %d plants, %d tablets, %,d surveys: ", step.plants(),
+                    step.plants() * TABLETS, step.surveys());
             rows.add(new Row(of + "received, each", step.received() * 1e3 / step.surveys(), "ms",
                     step == before ? 100 : before.received() * 1e3 / before.surveys() * 1.5, true));
             rows.add(new Row(of + "ranked", step.ranked() * 1e3, "ms", Math.max(200, before.ranked() * 1e3 * more),
@@ -75,10 +76,9 @@ final class PlantGrowthSuite implements Suite {
         int surveys = 0;
         double received = 0;
         try (OfficeStore store = OfficeStore.open(office, OfficeOptions.of(Clock.systemUTC()))) {
-            for (int plant = 0; plant < plants; plant++) {
-                Path tablet = Files.createDirectories(folder.resolve("tablet"));
-                DeviceKey key = DeviceKey.of(Files.createDirectories(tablet.resolve("" + plant)));
-                Path pack = pack(sample, plant, key, folder);
+            for (int tablet = 0; tablet < plants * TABLETS; tablet++) {
+                DeviceKey key = DeviceKey.of(Files.createDirectories(folder.resolve("tablets/" + tablet)));
+                Path pack = pack(sample, tablet, key, folder);
                 store.trust(key.fingerprint().text(), "", "bench");
                 long start = System.nanoTime();
                 Received got = store.receive(List.of(pack), "bench", Progress.NONE).get(0);
@@ -110,19 +110,21 @@ final class PlantGrowthSuite implements Suite {
         }
     }
 
-    /** A round of one plant, whose ids are its own. */
-    private static Path pack(Branch sample, int plant, DeviceKey key, Path folder) throws IOException {
+    /** A round that one tablet walked at its plant. */
+    private static Path pack(Branch sample, int tablet, DeviceKey key, Path folder) throws IOException {
+        int plant = tablet / TABLETS;
         List<Node> surveys = new ArrayList<>();
         for (Branch survey : sample.branches("surveys")) {
             if (!survey.has("supersedes")) {
-                surveys.add(survey.without("photos").with("id", new UUID(plant, surveys.size()).toString()));
+                surveys.add(survey.without("photos").with("id", new UUID(tablet, surveys.size()).toString())
+                        .with("round", "round-" + tablet));
             }
         }
-        Branch named = sample.with("id", new UUID(9, plant).toString())
+        Branch named = sample.with("id", new UUID(9, tablet).toString())
                 .with("plant", sample.branch("plant").orElseThrow().with("id", "plant-" + plant)
                         .with("name", "Plant " + plant))
                 .with("surveys", new Node.Series(surveys));
-        Path out = folder.resolve("pack-" + plant + ".zip");
+        Path out = folder.resolve("pack-" + tablet + ".zip");
         PackWriter.write(new Bundle(named), PhotoSource.folder(folder), key, out, Progress.NONE);
         return out;
     }

@@ -7,6 +7,7 @@ import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
 import bedmark.screen.part.Labels;
+import bedmark.screen.part.Pair;
 import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
@@ -26,7 +27,6 @@ import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
-import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.TilePane;
 import javafx.scene.layout.VBox;
@@ -88,10 +88,10 @@ public final class NewPlantView extends SidedScreen {
                 Math.floor((now.doubleValue() - materials.getHgap() * (MATERIALS_ACROSS - 1)) / MATERIALS_ACROSS)));
         chosen();
         questions.getChildren().setAll(Texts.wrapped(wording.text("first.plant.words")), trouble,
-                pair(field(Text.PLANT), field(Text.BELT)), new SectionHeader(wording.text("first.belt")),
+                new Pair(field(Text.PLANT), field(Text.BELT)), new SectionHeader(wording.text("first.belt")),
                 sizes.row(Size.WIDTH, Size.TROUGH, Size.CENTRE_ROLL),
                 new SectionHeader(wording.text("first.point")),
-                pair(field(Text.TAG), field(Text.FROM)),
+                new Pair(field(Text.TAG), field(Text.FROM)),
                 new SectionHeader(wording.text("first.material")), materials, ownName,
                 sizes.row(Size.DENSITY, Size.SURCHARGE), Labels.wrapped("what", wording.text("first.material.words")));
     }
@@ -110,16 +110,6 @@ public final class NewPlantView extends SidedScreen {
         VBox box = new VBox(label, field);
         box.getStyleClass().add("question");
         return box;
-    }
-
-    private static HBox pair(VBox left, VBox right) {
-        HBox pair = new HBox(left, right);
-        pair.getStyleClass().add("pair");
-        for (VBox box : List.of(left, right)) {
-            box.setPrefWidth(100);
-            HBox.setHgrow(box, Priority.ALWAYS);
-        }
-        return pair;
     }
 
     private ToggleButton tile(String id, String name, Runnable choose) {

@@ -11,6 +11,7 @@ import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.ChoiceRow;
 import bedmark.screen.part.FootBar;
 import bedmark.screen.part.Labels;
+import bedmark.screen.part.Pair;
 import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.Weight;
 import bedmark.screen.round.RoundModel;
@@ -96,8 +97,8 @@ public final class StartView extends SidedScreen {
             questions.getChildren().addAll(choice("screen.start.round", rounds()), progress());
         }
         questions.getChildren().addAll(limits(),
-                pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
-                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())), office);
+                new Pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
+                new Pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())), office);
     }
 
     /** How far the chosen round is: in words, and as its strip of ticks. */
@@ -118,16 +119,6 @@ public final class StartView extends SidedScreen {
         SettingsModel settings = new SettingsModel(workplace);
         return Labels.wrapped("limits", wording.text("settings.limits.short", settings.changedLimits(),
                 settings.limits().size()));
-    }
-
-    private static HBox pair(VBox left, VBox right) {
-        HBox pair = new HBox(left, right);
-        pair.getStyleClass().add("pair");
-        for (VBox box : List.of(left, right)) {
-            box.setPrefWidth(100);
-            HBox.setHgrow(box, Priority.ALWAYS);
-        }
-        return pair;
     }
 
     private ChoiceRow choice(String key, List<ChoiceRow.Option> options) {

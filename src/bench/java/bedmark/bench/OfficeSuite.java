@@ -44,6 +44,7 @@ import java.util.stream.Stream;
 /** The office: receiving beside the least that a database could do with the same rows, and ranking many zones. */
 final class OfficeSuite implements Suite {
     private static final int SURVEYS = 100;
+    private static final int PLANTS = 10;
     private static final int ZONES = 200_000;
     private static final String ROWS = "select digest, id, revision, supersedes, zone, round, status, begun, finished, "
             + "made, register, conveyor, drive, pack, content from survey order by pack";
@@ -66,12 +67,14 @@ final class OfficeSuite implements Suite {
             double hundred = receive(folder.resolve("hundred"), tablet, packs.subList(0, 100));
             raw(folder, packs.subList(0, 100), "warm-raw");
             double raw = raw(folder, packs.subList(0, 100), "raw");
+            double[] rank = rank(folder.resolve("rank"));
             return List.of(
                     new Row("office, 100 packs of 100 surveys received", hundred, "s", 2 * raw, true),
                     new Row("office, JDBC batch insert of the same rows and SHA-256 of the same bytes", raw, "s", raw,
                             true),
                     new Row("office, 10 times the surveys: times the time", hundred / ten, "", 11, true),
-                    new Row("office, 200,000 zones ranked", rank(folder.resolve("rank")), "s", 1, true));
+                    new Row("office, 200,000 zones ranked, just opened", rank[0], "s", 1, true),
+                    new Row("office, 200,000 zones ranked once more", rank[1], "s", 1, true));
         } finally {
             try (Stream<Path> files = Files.walk(folder)) {
                 files.sorted(Comparator.reverseOrder()).map(Path::toFile).forEach(File::delete);
@@ -93,7 +96,8 @@ final class OfficeSuite implements Suite {
                         .with("round", "round-" + pack + "-" + i / surveys.size()));
             }
             Path out = folder.resolve("pack" + pack + ".zip");
-            PackWriter.write(new Bundle(sample.with("id", UUID.randomUUID().toString())
+            Branch plant = sample.branch("plant").orElseThrow().with("id", "plant-" + pack % PLANTS);
+            PackWriter.write(new Bundle(sample.with("id", UUID.randomUUID().toString()).with("plant", plant)
                     .with("surveys", new Node.Series(held))), PhotoSource.folder(folder), key, out, Progress.NONE);
             packs.add(out);
         }
@@ -157,17 +161,20 @@ final class OfficeSuite implements Suite {
         }
     }
 
-    private double rank(Path office) throws IOException {
+    /** The time of the first list, which reads all rows, and the best of those that follow. */
+    private double[] rank(Path office) throws IOException {
         Path index = Files.createDirectories(office.resolve("index"));
         try (OfficeTables tables = OfficeTables.of(index)) {
             tables.whole(() -> fill(tables));
         }
         try (OfficeStore store = OfficeStore.open(office, OfficeOptions.of(Clock.systemUTC()))) {
-            double best = Double.POSITIVE_INFINITY;
+            double[] best = {0, Double.POSITIVE_INFINITY};
             for (int i = 0; i < 5; i++) {
                 long start = System.nanoTime();
                 List<RankedZone> ranked = store.rank();
-                best = Math.min(best, (System.nanoTime() - start) / 1e9);
+                double time = (System.nanoTime() - start) / 1e9;
+                best[0] = i == 0 ? time : best[0];
+                best[1] = i == 0 ? best[1] : Math.min(best[1], time);
                 if (ranked.size() != ZONES) {
                     throw new IllegalStateException("ranked " + ranked.size());
                 }

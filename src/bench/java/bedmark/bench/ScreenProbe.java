@@ -4,6 +4,7 @@ import bedmark.index.Store;
 import bedmark.screen.BedmarkApp;
 import bedmark.screen.Shell;
 import bedmark.screen.Workplace;
+import bedmark.screen.zone.FormOpening;
 import java.lang.management.ManagementFactory;
 import java.nio.file.Path;
 import java.time.Clock;
@@ -34,7 +35,9 @@ import javafx.stage.Stage;
  */
 public final class ScreenProbe {
     private static final String POINT = "TP-08";
+    private static final String DEPTH = "#slot-readings-bedDepths-0-depth";
     private static final int WARM_UP = 30;
+    private static final int FORM_TURNS = 60;
 
     private ScreenProbe() {
     }
@@ -52,12 +55,12 @@ public final class ScreenProbe {
                 Stage stage = new Stage();
                 stage.setScene(shell.scene());
                 stage.show();
-                new Person(shell.scene(), opens, keys, done).start();
+                new Person(workplace, shell.scene(), opens, keys, done).start();
             });
             done.await();
         }
         System.out.flush();
-        Runtime.getRuntime().halt(0);
+        System.exit(0);
     }
 
     /** What the screen's thread itself worked so far (ms): a busy machine makes it wait, but does not make it work. */
@@ -74,6 +77,7 @@ public final class ScreenProbe {
 
     /** Does one thing at each frame. */
     private static final class Person extends AnimationTimer {
+        private final Workplace workplace;
         private final Scene scene;
         private final CountDownLatch done;
         private final int opens;
@@ -84,7 +88,8 @@ public final class ScreenProbe {
         private long pressed;
         private boolean waiting;
 
-        Person(Scene scene, int opens, int keys, CountDownLatch done) {
+        Person(Workplace workplace, Scene scene, int opens, int keys, CountDownLatch done) {
+            this.workplace = workplace;
             this.scene = scene;
             this.opens = opens;
             this.done = done;
@@ -114,13 +119,26 @@ public final class ScreenProbe {
                 openOrReturn();
             } else if (scene.lookup("#correct") != null) {
                 press("#correct");
-            } else if (scene.lookup("#pad-next") != null && typist.typed(now)) {
+            } else if (scene.lookup("#pad-next") == null) {
+                Optional.ofNullable(scene.lookup(DEPTH)).ifPresent(Node::requestFocus);
+            } else if (typist.typed(now)) {
                 stop();
                 tell("open", opened.stream().skip(WARM_UP).mapToDouble(Double::doubleValue).toArray());
                 tell("open-work", workedForOpening.stream().skip(WARM_UP).mapToDouble(Double::doubleValue).toArray());
                 typist.tell();
+                System.out.printf(Locale.ROOT, "form %.4f%n", formRatio());
                 done.countDown();
             }
+        }
+
+        /** The time that a form of 200 fields takes to open, over that of one of 20. */
+        private double formRatio() {
+            StackPane room = new StackPane();
+            Stage stage = new Stage();
+            stage.setScene(new Scene(room, 490, 300));
+            stage.getScene().getStylesheets().setAll(scene.getStylesheets());
+            stage.show();
+            return FormOpening.ratio(workplace, room, 200, 20, FORM_TURNS);
         }
 
         private void openOrReturn() {
@@ -142,6 +160,43 @@ public final class ScreenProbe {
         }
     }
 
+    /** Adds up what one change costs the screen's thread: the handling itself, then style and layout of its frame. */
+    private static final class Watch {
+        private final double[] taken;
+        private final double[] worked;
+        private int at = -1;
+        private double since;
+        private double workedSince;
+
+        Watch(Scene scene, int changes) {
+            taken = new double[changes];
+            worked = new double[changes];
+            scene.addPreLayoutPulseListener(this::go);
+            scene.addPostLayoutPulseListener(() -> {
+                pause();
+                at = -1;
+            });
+        }
+
+        void begin(int change) {
+            at = change;
+            go();
+        }
+
+        private void go() {
+            since = System.nanoTime() / 1e6;
+            workedSince = ScreenProbe.worked();
+        }
+
+        private void pause() {
+            if (at >= 0) {
+                taken[at] += System.nanoTime() / 1e6 - since;
+                worked[at] += ScreenProbe.worked() - workedSince;
+            }
+        }
+
+    }
+
     /** Types into the depths, and changes a label in a bare window, in turn. */
     private static final class Typist {
         private static final String TYPED = "262\r";
@@ -150,9 +205,9 @@ public final class ScreenProbe {
         private final Scene scene;
         private final StringProperty text = new SimpleStringProperty("");
         private final Scene bare;
-        private final double[] keys;
-        private final double[] labels;
-        private final double[] keysWorked;
+        private final int keys;
+        private final Watch keyWatch;
+        private final Watch labelWatch;
         private int turn = -2 * WARM_UP;
         private long lastFrame;
         private int keysMissed;
@@ -160,15 +215,15 @@ public final class ScreenProbe {
 
         Typist(Scene scene, int keys) {
             this.scene = scene;
-            this.keys = new double[keys];
-            this.labels = new double[keys];
-            this.keysWorked = new double[keys];
+            this.keys = keys;
             Label label = new Label();
             label.textProperty().bind(text);
             bare = new Scene(new StackPane(label), 200, 100);
             Stage stage = new Stage();
             stage.setScene(bare);
             stage.show();
+            keyWatch = new Watch(scene, keys);
+            labelWatch = new Watch(bare, keys);
         }
 
         /** Whether all is typed. */
@@ -180,55 +235,47 @@ public final class ScreenProbe {
                 labelsMissed += missed && turn % 2 == 0 ? 1 : 0;
             }
             lastFrame = now;
-            if (turn >= 2 * keys.length) {
+            if (turn >= 2 * keys) {
                 return true;
             }
             int at = Math.floorDiv(turn, 2);
             boolean key = Math.floorMod(turn, 2) == 0;
-            double millis = key ? key(at) : label(at);
-            if (turn >= 0) {
-                (key ? keys : labels)[at] = millis;
+            if (key) {
+                key(at);
+            } else {
+                label(at);
             }
             turn++;
             return false;
         }
 
-        private double key(int at) {
+        private void key(int at) {
             char sign = TYPED.charAt(Math.floorMod(at, TYPED.length()));
-            Node first = scene.lookup("#slot-readings-bedDepths-0-depth");
+            Node first = scene.lookup(DEPTH);
             if (first != null && Math.floorMod(at, 16) == 0) {
                 first.requestFocus();
             }
             Node target = scene.getFocusOwner();
-            double before = worked();
-            long start = System.nanoTime();
+            keyWatch.begin(at);
             Event.fireEvent(target, sign == '\r'
                     ? new KeyEvent(KeyEvent.KEY_PRESSED, "", "", KeyCode.ENTER, false, false, false, false)
                     : new KeyEvent(KeyEvent.KEY_TYPED, String.valueOf(sign), "", KeyCode.UNDEFINED, false, false,
                             false, false));
-            scene.getRoot().applyCss();
-            scene.getRoot().layout();
-            double taken = (System.nanoTime() - start) / 1e6;
-            if (at >= 0) {
-                keysWorked[at] = worked() - before;
-            }
-            return taken;
+            keyWatch.pause();
         }
 
-        private double label(int at) {
-            long start = System.nanoTime();
+        private void label(int at) {
+            labelWatch.begin(at);
             text.set(Integer.toString(at));
-            bare.getRoot().applyCss();
-            bare.getRoot().layout();
-            return (System.nanoTime() - start) / 1e6;
+            labelWatch.pause();
         }
 
         void tell() {
-            ScreenProbe.tell("key", keys);
-            ScreenProbe.tell("key-work", keysWorked);
-            ScreenProbe.tell("label", labels);
-            System.out.printf(Locale.ROOT, "missed %.5f %.5f%n", 100.0 * keysMissed / keys.length,
-                    100.0 * labelsMissed / labels.length);
+            ScreenProbe.tell("key", keyWatch.taken);
+            ScreenProbe.tell("key-work", keyWatch.worked);
+            ScreenProbe.tell("label", labelWatch.taken);
+            System.out.printf(Locale.ROOT, "missed %.5f %.5f%n", 100.0 * keysMissed / keys,
+                    100.0 * labelsMissed / keys);
         }
     }
 }

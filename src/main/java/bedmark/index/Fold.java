@@ -45,13 +45,21 @@ final class Fold {
         }
         try {
             SurveyHistory next = SurveyHistory.after(history, entry).orElseThrow();
-            requireSame(history, next, survey);
-            requireReadable(next.survey());
+            if (!isReading(entry.act())) {
+                requireSame(history, next, survey);
+                requireReadable(next.survey());
+            }
             return next;
         } catch (IllegalStateException | IllegalArgumentException | ArithmeticException e) {
             throw new Refused(Defect.in(survey.toString(), "act-unfit", entry.act().code(),
                     history.map(known -> known.state().name().toLowerCase(Locale.ROOT)).orElse("new")), e);
         }
+    }
+
+    /** Most answers by far stand where they can change nothing else. */
+    private static boolean isReading(Act act) {
+        return act instanceof Act.AnswerSet set && (Survey.READINGS.holds(set.where())
+                || Survey.OBSERVATIONS.holds(set.where()));
     }
 
     /** No answer may turn a survey into another one. */

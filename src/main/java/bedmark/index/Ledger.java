@@ -22,6 +22,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
+import java.util.concurrent.BlockingQueue;
+import java.util.concurrent.LinkedBlockingQueue;
 import java.util.function.Consumer;
 import java.util.function.Function;
 
@@ -39,6 +41,7 @@ final class Ledger implements AutoCloseable {
     private final List<Defect> found = new ArrayList<>();
     private Optional<Index> index = Optional.empty();
     private Optional<Journal> journal = Optional.empty();
+    private final BlockingQueue<Journal.Saved> untold = new LinkedBlockingQueue<>();
     private boolean begunAnew;
     private boolean rebuilt;
     private long replayed;
@@ -205,9 +208,8 @@ final class Ledger implements AutoCloseable {
 
     /** Asks the index as it is. */
     <T> T peek(Function<Index, T> question) {
-        Index asked = index.orElseThrow(() -> new IndexBroken("there is no index"));
-        asked.flush();
-        return question.apply(asked);
+        catchUp();
+        return question.apply(index.orElseThrow(() -> new IndexBroken("there is no index")));
     }
 
     private void rebuild(Consumer<UUID> beginning) {
@@ -248,19 +250,31 @@ final class Ledger implements AutoCloseable {
     }
 
     /**
-     * Tells the index of an entry that was saved, unless it knows it from walking the journal meanwhile.
+     * Leaves an entry that was saved for the index, which hears of it before it is next asked; from any thread.
      *
-     * @param last whether it is made last now
+     * @return how many it has yet to hear of
      */
-    void index(Journal.Saved saved, boolean last) {
+    int tell(Journal.Saved saved) {
+        untold.add(saved);
+        return untold.size();
+    }
+
+    /** Makes the index hear of what was saved. */
+    void catchUp() {
         indexing(asked -> {
-            if (asked.mark().filter(mark -> mark.sequence() >= saved.entry().sequence()).isEmpty()) {
+            hear(asked);
+            asked.flush();
+        });
+    }
+
+    /** What the index knows already it knows from walking the journal meanwhile. */
+    private void hear(Index asked) {
+        for (Journal.Saved saved = untold.poll(); saved != null; saved = untold.poll()) {
+            long sequence = saved.entry().sequence();
+            if (asked.mark().filter(mark -> mark.sequence() >= sequence).isEmpty()) {
                 asked.add(saved.entry(), saved.place());
             }
-            if (last) {
-                asked.flush();
-            }
-        });
+        }
     }
 
     /** The last entry that this version can read. */
@@ -300,7 +314,7 @@ final class Ledger implements AutoCloseable {
 
     @Override
     public void close() {
-        indexing(Index::flush);
+        catchUp();
         dropIndex();
         reader.close();
         journal.ifPresent(Journal::close);

@@ -11,7 +11,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.UUID;
-import java.util.concurrent.atomic.AtomicInteger;
+import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.concurrent.locks.Lock;
 import java.util.concurrent.locks.ReentrantLock;
 import java.util.function.Function;
@@ -23,12 +23,13 @@ import java.util.function.Function;
  */
 final class Pen {
     private static final int KEPT = 64;
-    private static final int MOST_WAITING = 1000;
+    private static final int MOST_UNTOLD = 1000;
+    private static final long MILLIS_LATER = 5;
 
     private final Lock turn = new ReentrantLock();
     private final Desk desk;
     private final Ledger ledger;
-    private final AtomicInteger waiting = new AtomicInteger();
+    private final AtomicBoolean called = new AtomicBoolean();
     private final Map<UUID, Optional<SurveyHistory>> known = new LinkedHashMap<>(16, 0.75f, true);
     private boolean closed;
 
@@ -74,16 +75,26 @@ final class Pen {
     }
 
     private void forget() {
-        List<UUID> oldestFirst = List.copyOf(known.keySet());
-        oldestFirst.subList(0, Math.max(0, oldestFirst.size() - KEPT)).forEach(known::remove);
+        if (known.size() > 2 * KEPT) {
+            List<UUID> oldestFirst = List.copyOf(known.keySet());
+            oldestFirst.subList(0, oldestFirst.size() - KEPT).forEach(known::remove);
+        }
     }
 
-    /** The index hears of the entry before it is asked anything else; while more wait, it need not be made last. */
+    /** The index is not woken at once, since it would then work while the person still waits. */
     private void tell(Journal.Saved saved) {
-        int before = waiting.getAndIncrement();
-        desk.begin(() -> ledger.index(saved, waiting.decrementAndGet() == 0));
-        if (before >= MOST_WAITING) {
-            desk.call(() -> true);
+        int untold = ledger.tell(saved);
+        if (!called.getAndSet(true)) {
+            desk.begin(() -> {
+                called.set(false);
+                ledger.catchUp();
+            }, MILLIS_LATER);
+        }
+        if (untold >= MOST_UNTOLD) {
+            desk.call(() -> {
+                ledger.catchUp();
+                return true;
+            });
         }
     }
 

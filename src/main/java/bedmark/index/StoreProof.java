@@ -52,9 +52,10 @@ final class StoreProof implements JournalVisitor {
     /** Proves a store while it is open; what is saved meanwhile is left out. */
     static StoreCheck ofOpen(Path folder, FileLayer files, Optional<DataKey> key, Progress progress, Desk desk,
                              Ledger ledger) {
-        Journal.Extent extent = desk.call(ledger::extent);
-        return new StoreProof(folder, files, key, progress, new IndexProof.OfOpen(desk, ledger))
-                .run(folder, Optional.of(extent), true);
+        StoreProof proof = new StoreProof(folder, files, key, progress, new IndexProof.OfOpen(desk, ledger));
+        // The index first: what is saved between the two is then in the journal's part and not in the index's.
+        proof.index.begin(true);
+        return proof.run(folder, Optional.of(desk.call(ledger::extent)), true);
     }
 
     /** Proves a store that this program has not open. */
@@ -66,8 +67,9 @@ final class StoreProof implements JournalVisitor {
         try (Database database = Database.openToRead(indexFolder, key.map(DataKey::indexPassword));
              EntryReader reader = new EntryReader(folder.resolve(Ledger.JOURNAL), files, Cover.of(key))) {
             Index index = Index.goOn(database, LevelOf.NONE, reader::read);
-            return new StoreProof(folder, files, key, progress, new IndexProof.OfClosed(index))
-                    .run(folder, Optional.empty(), true);
+            StoreProof proof = new StoreProof(folder, files, key, progress, new IndexProof.OfClosed(index));
+            proof.index.begin(true);
+            return proof.run(folder, Optional.empty(), true);
         } catch (IndexBroken e) {
             return unindexed(folder, files, key, progress, "index-unusable");
         } catch (Refused e) {
@@ -82,13 +84,13 @@ final class StoreProof implements JournalVisitor {
                                         String why) {
         StoreProof proof = new StoreProof(folder, files, key, progress, new IndexProof.OfNone());
         proof.defects.add(Defect.in(Ledger.INDEX, why));
+        proof.index.begin(false);
         return proof.run(folder, Optional.empty(), false);
     }
 
     private StoreCheck run(Path folder, Optional<Journal.Extent> extent, boolean compare) {
         Path journalFolder = folder.resolve(Ledger.JOURNAL);
         try {
-            index.begin(compare);
             proveKey(folder);
             JournalProof journal = JournalProof.of(journalFolder, files, cover, extent, this);
             journal.tail().ifPresent(defects::add);

@@ -6,6 +6,7 @@ import java.io.RandomAccessFile;
 import java.nio.ByteBuffer;
 import java.nio.channels.ClosedByInterruptException;
 import java.nio.channels.FileChannel;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
@@ -92,6 +93,10 @@ final class DiskLayer implements FileLayer {
 
     @Override
     public void move(Path from, Path to) throws IOException {
+        // A device such as /dev/null would be replaced by a file, for every program of the machine.
+        if (Files.exists(to) && !Files.isRegularFile(to) && !Files.isDirectory(to)) {
+            throw new FileSystemException(to.toString(), null, "a device, not a file");
+        }
         Files.move(from, to, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
     }
 

@@ -8,7 +8,9 @@ import bedmark.document.Refused;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.UUID;
 
 /** Journal entries as JSON: who, when and which device around one act. */
@@ -18,16 +20,17 @@ public final class EntryCodec {
 
     /** The payload of an entry. */
     public static byte[] write(Entry entry) {
-        return JsonWriter.compact(act(entry.act(), Branch.EMPTY
-                .with("sequence", Node.number(entry.sequence()))
-                .with("at", Node.time(entry.at()))
-                .with("person", entry.person())
-                .with("device", entry.device().toString())
-                .with("act", entry.act().code())));
+        Map<String, Node> head = new LinkedHashMap<>();
+        head.put("sequence", Node.number(entry.sequence()));
+        head.put("at", Node.time(entry.at()));
+        head.put("person", Node.text(entry.person()));
+        head.put("device", Node.text(entry.device().toString()));
+        head.put("act", Node.text(entry.act().code()));
+        entry.act().about().ifPresent(survey -> head.put("survey", Node.text(survey.toString())));
+        return JsonWriter.compact(act(entry.act(), new Branch(head)));
     }
 
-    private static Branch act(Act act, Branch head) {
-        Branch branch = act.about().map(id -> head.with("survey", id.toString())).orElse(head);
+    private static Branch act(Act act, Branch branch) {
         if (act instanceof Act.RegisterTaken taken) {
             return branch.with("register", taken.register());
         } else if (act instanceof Act.SurveyTaken taken) {

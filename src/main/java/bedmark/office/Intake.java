@@ -12,6 +12,7 @@ import bedmark.json.Canonical;
 import bedmark.survey.Bundle;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.Register;
+import bedmark.survey.RoundIntake;
 import bedmark.survey.Survey;
 import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Origin;
@@ -58,8 +59,8 @@ record Intake(PlantRow plant, byte[] register, List<CopyRow> copies) {
 
     /** The part of a bundle that holds register, forms and rounds. */
     private static Branch head(Branch bundle) {
-        Branch head = Branch.EMPTY;
-        for (String key : List.of("plant", "forms", "rounds")) {
+        Branch head = Branch.EMPTY.with("plant", RoundIntake.unnoted(bundle.branch("plant").orElse(Branch.EMPTY)));
+        for (String key : List.of("forms", "rounds")) {
             Optional<Node> part = bundle.get(key);
             head = part.isPresent() ? head.with(key, part.get()) : head;
         }
@@ -68,8 +69,8 @@ record Intake(PlantRow plant, byte[] register, List<CopyRow> copies) {
 
     /** A plant's row. */
     static PlantRow plant(Branch head, long made, boolean own) {
-        Branch plant = head.branch("plant").orElse(Branch.EMPTY);
-        byte[] text = Canonical.bytes(head);
+        Branch plant = RoundIntake.unnoted(head.branch("plant").orElse(Branch.EMPTY));
+        byte[] text = Canonical.bytes(head.with("plant", plant));
         return new PlantRow(plant.text("id").orElse(""), made, own, Digest.of(text).hex(),
                 Digest.of(Canonical.bytes(plant)).hex(), text);
     }
@@ -93,7 +94,7 @@ record Intake(PlantRow plant, byte[] register, List<CopyRow> copies) {
     }
 
     static byte[] registerText(Register register) {
-        return Canonical.bytes(register.document());
+        return Canonical.bytes(RoundIntake.unnoted(register.document()));
     }
 
     static String plantId(Register register) {

@@ -8,6 +8,7 @@ import bedmark.json.AssessmentWriter;
 import bedmark.json.JsonWriter;
 import bedmark.journal.Progress;
 import bedmark.office.FlatColumn.FlatRow;
+import bedmark.survey.merge.Copy;
 import java.io.IOException;
 import java.io.Writer;
 import java.net.URLEncoder;
@@ -70,13 +71,13 @@ public final class OfficeExport {
 
     private void registers(Path folder) throws IOException {
         Files.createDirectories(folder);
-        for (Map.Entry<String, byte[]> register : store.registerVersions().entrySet()) {
+        for (Map.Entry<String, byte[]> register : registerVersions().entrySet()) {
             Files.write(folder.resolve(register.getKey() + ".json"), register.getValue());
         }
     }
 
     private long surveys(Path out, Progress progress) throws IOException {
-        List<String> digests = store.contents();
+        List<String> digests = contents();
         for (int from = 0; from < digests.size(); from += AT_ONCE) {
             progress.at(from, digests.size());
             SortedMap<String, StringBuilder> json = new TreeMap<>();
@@ -118,5 +119,19 @@ public final class OfficeExport {
             branch = branch.with("assessment", AssessmentWriter.write(row.judged().get().assessment()));
         }
         return new String(JsonWriter.compact(branch), StandardCharsets.UTF_8);
+    }
+
+    /** The digests of everything that came, by zone, survey and revision. */
+    private List<String> contents() {
+        return store.ask(tables -> tables.copies().stream().map(Copy::digest).toList());
+    }
+
+    /** Every version of every register that a survey was made with, by digest. */
+    private SortedMap<String, byte[]> registerVersions() {
+        return store.ask(tables -> {
+            SortedMap<String, byte[]> versions = new TreeMap<>();
+            tables.registers().forEach(digest -> versions.put(digest, tables.register(digest).orElseThrow()));
+            return versions;
+        });
     }
 }

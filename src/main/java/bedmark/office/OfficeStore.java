@@ -13,33 +13,24 @@ import bedmark.index.office.ZoneRow;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
 import bedmark.journal.Progress;
-import bedmark.json.BundleReader;
 import bedmark.json.JsonReader;
 import bedmark.office.FlatColumn.FlatRow;
 import bedmark.office.trend.ZoneTrend;
 import bedmark.pack.DeviceKey;
-import bedmark.pack.PackReader;
-import bedmark.pack.PackedPhoto;
-import bedmark.pack.ReadPack;
 import bedmark.pack.Receipt;
 import bedmark.pack.ReceiptWriter;
-import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Register;
 import bedmark.survey.Survey;
-import bedmark.survey.merge.Clash;
 import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Merge;
 import bedmark.survey.merge.MergedZone;
 import bedmark.survey.merge.ZoneId;
-import java.io.ByteArrayOutputStream;
 import java.io.Closeable;
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
+import java.lang.ref.SoftReference;
 import java.nio.file.Path;
-import java.time.Duration;
-import java.time.OffsetDateTime;
 import java.time.ZonedDateTime;
 import java.util.ArrayList;
 import java.util.Collection;
@@ -50,9 +41,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import java.util.SortedMap;
-import java.util.TreeMap;
-import java.util.UUID;
 import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.function.Function;
 
@@ -66,7 +54,6 @@ public final class OfficeStore implements AutoCloseable {
     private static final String PASSING = "passing";
     private static final String OFFICE = "office.json";
     private static final int JUDGED_AT_ONCE = 500;
-    private static final int PACKS_OPEN = 8;
 
     private final Path folder;
     private final OfficeOptions options;
@@ -76,9 +63,9 @@ public final class OfficeStore implements AutoCloseable {
     private final Device device;
     private final Books books;
     private final Judge judge;
-    /** Packs that were proved, for their photos. */
-    private final Map<String, ReadPack> open = new HashMap<>();
+    private final PackPhotos photos;
     private Minutes minutes = new Minutes();
+    private SoftReference<List<ZoneRow>> rows = new SoftReference<>(null);
     private final AtomicBoolean closed = new AtomicBoolean();
 
     private OfficeStore(Path folder, Optional<String> url, OfficeOptions options, Desk desk, Closeable lock,
@@ -90,6 +77,7 @@ public final class OfficeStore implements AutoCloseable {
         this.shelf = new PackShelf(folder.resolve(url.isPresent() ? PASSING : PACKS), options.files(),
                 url.isPresent());
         shelf.open();
+        this.photos = new PackPhotos(shelf, options.limits());
         DeviceFile file = new DeviceFile(folder, options.files(), OFFICE);
         Optional<Device> known = file.read();
         this.device = known.isPresent() ? known.get() : file.write(Optional.empty(), options.name());
@@ -180,7 +168,7 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     /** What was done so far; called on the store's thread. */
-    private Minutes minutes(OfficeTables tables) {
+    Minutes minutes(OfficeTables tables) {
         minutes.readOn(tables);
         return minutes;
     }
@@ -189,7 +177,8 @@ public final class OfficeStore implements AutoCloseable {
         return new Register(JsonReader.read(books.tables().register(digest).orElseThrow()).root());
     }
 
-    private <T> T ask(Function<OfficeTables, T> question) {
+    /** Asks the tables on the store's own thread. */
+    <T> T ask(Function<OfficeTables, T> question) {
         try {
             return desk.call(() -> books.ask(() -> question.apply(books.tables())));
         } catch (OfficeBroken e) {
@@ -198,83 +187,20 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     /**
-     * Takes packs in, one after the other; each whole or not at all. A person may stop it between two of them.
+     * Takes packs in, one after the other; each whole or not at all. The next ones are proved meanwhile. A person may
+     * stop it between two of them.
      *
      * @param person   who receives
      * @param progress told of the packs, and asked whether to stop
      * @return what came of each, in their order; fewer than there are files where it was stopped
      */
     public List<Received> receive(List<Path> files, String person, Progress progress) {
-        List<Received> received = new ArrayList<>();
-        for (Path file : files) {
-            if (progress.cancelled()) {
-                return received;
-            }
-            progress.at(received.size(), files.size());
-            received.add(receive(file, person));
-        }
-        progress.at(files.size(), files.size());
-        return received;
+        return new Receiving(this, shelf, options).receive(files, person, progress);
     }
 
     /** Takes one pack in, whole or not at all. Receiving it again changes nothing. */
     public Received receive(Path file, String person) {
-        Optional<String> fingerprint = Optional.empty();
-        Optional<Path> part = Optional.empty();
-        try {
-            PackShelf.Laid laid = shelf.lay(file);
-            part = Optional.of(laid.part());
-            ReadPack pack = new PackReader(options.limits(), BundleReader::read).open(laid.part(), Progress.NONE);
-            fingerprint = Optional.of(pack.fingerprint().text());
-            return take(file, laid, pack, person);
-        } catch (Refused e) {
-            part.ifPresent(shelf::drop);
-            Defect why = part.isPresent() && e.defect().where().equals(part.get().toString())
-                    ? new Defect(e.defect().code(), file.toString(), e.defect().details()) : e.defect();
-            return new Received.Turned(file, why, fingerprint);
-        }
-    }
-
-    private Received take(Path file, PackShelf.Laid laid, ReadPack pack, String person) {
-        String fingerprint = pack.fingerprint().text();
-        Branch document = pack.bundle().document();
-        Branch sender = document.branch("device").orElse(Branch.EMPTY);
-        String name = sender.text("name").orElse("");
-        String shown = name.isBlank() ? fingerprint : name;
-        if (!ask(tables -> minutes(tables).trusts(fingerprint))) {
-            throw new Refused(Defect.in(shown, "device-untrusted", fingerprint));
-        }
-        Intake intake = Intake.of(pack.bundle(), laid.sha256());
-        OfficeDeed deed = new OfficeDeed.PackReceived(laid.sha256(), file.getFileName().toString(), laid.bytes(),
-                fingerprint, document.uuid("id"), document.time("createdAt"), sender.uuid("id"), name);
-        Set<String> before = ask(tables -> tables.known(digests(intake)));
-        Optional<Entry> entry = keep(tables -> tables.hasPack(laid.sha256()), () -> shelf.keep(laid),
-                new Books.Deed(person, deed, Optional.of(intake)));
-        shelf.passed(laid.sha256());
-        if (entry.isEmpty()) {
-            shelf.drop(laid.part());
-            return new Received.AlreadyHere(file, laid.sha256(), shown, fingerprint, receipt(document, intake,
-                    received(laid.sha256())));
-        }
-        int known = (int) digests(intake).stream().filter(before::contains).count();
-        return new Received.Taken(file, laid.sha256(), shown, fingerprint, digests(intake).size() - known, known,
-                clashes(intake), ahead(document, entry.get().at()), receipt(document, intake, entry.get()));
-    }
-
-    /** The entry by which a pack was taken in. */
-    private Entry received(String sha256) {
-        return packs().stream().filter(entry -> entry.act() instanceof Act.OfficeActed acted
-                && acted.deed() instanceof OfficeDeed.PackReceived pack && pack.sha256().equals(sha256))
-                .findFirst().orElseThrow();
-    }
-
-    /** The same receipt however often the same pack comes. */
-    private Optional<Receipt> receipt(Branch bundle, Intake intake, Entry entry) {
-        String sha256 = intake.copies().isEmpty() ? "" : intake.copies().get(0).pack();
-        return bundle.uuid("id").filter(id -> !sha256.isEmpty()).map(id -> Receipt.of(
-                UUID.nameUUIDFromBytes((device.id() + sha256).getBytes(StandardCharsets.US_ASCII)), entry.at(),
-                new Receipt.Office(device.id(), device.name()), id, sha256, intake.copies().stream().map(row ->
-                        new Receipt.Item(row.copy().id(), row.copy().revision(), row.copy().digest())).toList()));
+        return new Receiving(this, shelf, options).receive(file, person);
     }
 
     /**
@@ -292,23 +218,6 @@ public final class OfficeStore implements AutoCloseable {
         return DeviceKey.of(folder);
     }
 
-    private static Set<String> digests(Intake intake) {
-        Set<String> digests = new HashSet<>();
-        intake.copies().forEach(row -> digests.add(row.copy().digest()));
-        return digests;
-    }
-
-    private List<Clash> clashes(Intake intake) {
-        Set<ZoneId> zones = new HashSet<>();
-        intake.copies().forEach(row -> zones.add(row.copy().zone()));
-        return ask(tables -> Merge.zones(tables.copies(tables.clashing(zones)), minutes(tables).setAside())
-                .values().stream().flatMap(zone -> zone.clashes().stream()).toList());
-    }
-
-    private static long ahead(Branch bundle, OffsetDateTime now) {
-        return bundle.time("createdAt").map(at -> Math.max(0, Duration.between(now, at).toSeconds())).orElse(0L);
-    }
-
     /**
      * Does something that the office decided.
      *
@@ -321,10 +230,12 @@ public final class OfficeStore implements AutoCloseable {
         return keep(tables -> false, () -> { }, new Books.Deed(person, deed, Optional.empty())).orElseThrow();
     }
 
-    private Optional<Entry> keep(Function<OfficeTables, Boolean> needless, Runnable first, Books.Deed deed) {
+    /** Does a deed unless it is needless, and something before it. */
+    Optional<Entry> keep(Function<OfficeTables, Boolean> needless, Runnable first, Books.Deed deed) {
         try {
             return desk.call(() -> {
                 try {
+                    rows.clear();
                     return books.keep(() -> {
                         if (needless.apply(books.tables())) {
                             return true;
@@ -369,8 +280,18 @@ public final class OfficeStore implements AutoCloseable {
         ZonedDateTime now = ZonedDateTime.now(options.clock());
         return ask(tables -> {
             Minutes known = minutes(tables);
-            return new Ranking(now, query, known::answers).rank(tables.zones());
+            return new Ranking(now, query, known::answers).rank(zones(tables));
         });
+    }
+
+    /** Every zone's row; kept until something changes, where nobody else can change it. */
+    private List<ZoneRow> zones(OfficeTables tables) {
+        List<ZoneRow> kept = rows.get();
+        if (kept == null || books instanceof ServerBooks) {
+            kept = tables.zones();
+            rows = new SoftReference<>(kept);
+        }
+        return kept;
     }
 
     /** A zone as it stands in the list. */
@@ -396,6 +317,7 @@ public final class OfficeStore implements AutoCloseable {
                 latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
                         sides.stream().min(Judge.WORST_FIRST).map(worst -> Judge.verdict(worst.assessment()))));
                 tables.judge(verdicts);
+                rows.clear();
                 return zones.size();
             });
             if (judged == 0) {
@@ -466,32 +388,7 @@ public final class OfficeStore implements AutoCloseable {
     /** The bytes of a photo of a survey; nothing where no pack holds it. */
     public Optional<byte[]> photo(JudgedZone zone, String sha256) {
         return desk.call(() -> books.ask(() -> books.tables().packOf(zone.copy().digest())).flatMap(pack ->
-                photo(pack, sha256)));
-    }
-
-    private Optional<byte[]> photo(String pack, String sha256) {
-        if (!shelf.has(pack)) {
-            books.ask(() -> books.tables().pack(pack)).ifPresent(content -> shelf.lay(pack, content));
-        }
-        if (!open.containsKey(pack)) {
-            if (open.size() > PACKS_OPEN) {
-                open.clear();
-            }
-            open.put(pack, new PackReader(options.limits(), BundleReader::read).open(shelf.file(pack),
-                    Progress.NONE));
-        }
-        ReadPack read = open.get(pack);
-        Optional<PackedPhoto> found = read.photos().stream().filter(one -> one.sha256().equals(sha256)).findFirst();
-        if (found.isEmpty()) {
-            return Optional.empty();
-        }
-        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
-        try {
-            read.copy(found.get(), bytes);
-            return Optional.of(bytes.toByteArray());
-        } catch (IOException e) {
-            throw new Refused(Fault.defect("store", e, options.files(), folder), e);
-        }
+                photos.bytes(books, pack, sha256)));
     }
 
     /** A zone over time. */
@@ -503,11 +400,6 @@ public final class OfficeStore implements AutoCloseable {
                 .filter(copy -> copy.result() && !digests.contains(copy.digest())).toList(),
                 copy -> copy.origin().register()));
         return ZoneTrend.of(zone, counted, replaced);
-    }
-
-    /** The digests of everything that came, by zone, survey and revision. */
-    List<String> contents() {
-        return ask(tables -> tables.copies().stream().map(Copy::digest).toList());
     }
 
     /** Contents with what the flat table tells of them, in the order of the digests. */
@@ -526,15 +418,6 @@ public final class OfficeStore implements AutoCloseable {
             return ordered.stream().map(copy -> new FlatRow(copy, counting.contains(copy.digest()),
                     documents.get(copy.digest()), judge.register(copy.origin().register()),
                     Optional.ofNullable(judged.get(copy.digest())))).toList();
-        });
-    }
-
-    /** Every version of every register that a survey was made with, by digest. */
-    SortedMap<String, byte[]> registerVersions() {
-        return ask(tables -> {
-            SortedMap<String, byte[]> versions = new TreeMap<>();
-            tables.registers().forEach(digest -> versions.put(digest, tables.register(digest).orElseThrow()));
-            return versions;
         });
     }
 

@@ -33,10 +33,15 @@ public record PhotoFacts(Orientation orientation, Optional<LocalDateTime> taken,
     /** Reads a file; one that can't be read says nothing. */
     public static PhotoFacts of(Path file) {
         try (InputStream in = Files.newInputStream(file)) {
-            return of(in.readNBytes(FIRST_PART));
+            return of(in);
         } catch (IOException e) {
             return NONE;
         }
+    }
+
+    /** Reads the first part of a photo; the stream stays open. */
+    public static PhotoFacts of(InputStream photo) throws IOException {
+        return of(photo.readNBytes(FIRST_PART));
     }
 
     /** Reads the first bytes of a photo. */
@@ -50,9 +55,18 @@ public record PhotoFacts(Orientation orientation, Optional<LocalDateTime> taken,
      * @throws IOException where it can't be read
      */
     public static Optional<Defect> doubt(Path file) throws IOException {
-        try (InputStream in = new BufferedInputStream(Files.newInputStream(file))) {
-            return PhotoHeader.doubt(file.getFileName().toString(), in, PackLimits.STANDARD);
+        try (InputStream in = Files.newInputStream(file)) {
+            return doubt(file.getFileName().toString(), in);
         }
+    }
+
+    /**
+     * As {@link #doubt(Path)}, for a photo that is read from elsewhere.
+     *
+     * @param name what it is called in the sentence
+     */
+    public static Optional<Defect> doubt(String name, InputStream photo) throws IOException {
+        return PhotoHeader.doubt(name, new BufferedInputStream(photo), PackLimits.STANDARD);
     }
 
     /**

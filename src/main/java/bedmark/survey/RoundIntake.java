@@ -20,8 +20,10 @@ import java.util.function.Predicate;
  */
 public final class RoundIntake {
 
-    /** Where a tablet's register keeps what the office wants the person at the point to know. */
+    /** Where a transfer point of a tablet's register keeps what the office wants the person there to know. */
     public static final String NOTES = "officeNotes";
+    /** Where it keeps what the office knows to be open there. */
+    public static final String ACTIONS = "openActions";
     private static final String FILE = "roundFile";
 
     private RoundIntake() {
@@ -49,12 +51,11 @@ public final class RoundIntake {
         }
         requireNewer(file, before);
         Branch head = Branch.EMPTY
-                .with("plant", kept(plant, oldPlant, underWay))
+                .with("plant", noted(kept(plant, oldPlant, underWay), file.branches("notes")))
                 .with("forms", with(file.branches("forms"), before.branches("forms"), form ->
                         underWay.stream().anyMatch(survey -> madeWith(survey, form))))
                 .with("rounds", with(file.branches("rounds"), before.branches("rounds"), round ->
                         underWay.stream().anyMatch(survey -> survey.round().equals(round.text("id")))))
-                .with(NOTES, new Node.Series(file.series("notes")))
                 .with(FILE, Branch.EMPTY.with("id", file.text("id").orElseThrow())
                         .with("createdAt", file.text("createdAt").orElseThrow())
                         .with("office", office));
@@ -72,6 +73,33 @@ public final class RoundIntake {
     public static boolean trusts(Optional<Branch> current, String office) {
         return current.flatMap(head -> head.branch(FILE)).flatMap(one -> one.text("office"))
                 .equals(Optional.of(office));
+    }
+
+    /** A plant without what an office noted at its points: that is no part of the register. */
+    public static Branch unnoted(Branch plant) {
+        return !plant.has("transfers") ? plant : plant.with("transfers", new Node.Series(plant.branches("transfers")
+                .stream().map(transfer -> (Node) transfer.without(NOTES).without(ACTIONS)).toList()));
+    }
+
+    private static Branch noted(Branch plant, List<Branch> notes) {
+        List<Node> transfers = new ArrayList<>();
+        for (Branch transfer : unnoted(plant).branches("transfers")) {
+            List<Node> words = new ArrayList<>();
+            List<Node> actions = new ArrayList<>();
+            notes.stream().filter(note -> note.text("transfer").equals(transfer.text("id"))).forEach(note -> {
+                if (note.text("kind").equals(Optional.of("action"))) {
+                    actions.add(PlannedAction.NONE.with("what", note.text("text").orElse(""))
+                            .with("who", note.text("owner").orElse("")).with("by", note.text("due").orElse(""))
+                            .with("workOrder", note.text("workOrder").orElse(""))
+                            .with("assetId", transfer.text("assetId").orElse("")).document());
+                } else {
+                    words.add(note.without("transfer"));
+                }
+            });
+            Branch with = words.isEmpty() ? transfer : transfer.with(NOTES, new Node.Series(words));
+            transfers.add(actions.isEmpty() ? with : with.with(ACTIONS, new Node.Series(actions)));
+        }
+        return plant.with("transfers", new Node.Series(transfers));
     }
 
     private static void requireNewer(Branch file, Branch before) {

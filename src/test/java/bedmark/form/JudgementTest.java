@@ -138,9 +138,9 @@ class JudgementTest {
     }
 
     @Test
-    void depthIsComparedWithTheSameStationOfTheLastSurvey() {
+    void depthIsComparedWithTheBedOfTheLastSurveyAtTheSamePlace() {
         Branch now = survey("bedDepths", Node.Series.of(station("1", "0.2"), station("3", "0.2")));
-        Branch last = survey("bedDepths", Node.Series.of(station("2", "0.02"), station("3", "0.02")));
+        Branch last = survey("bedDepths", Node.Series.of(station("2", "0.15"), station("3", "0.02")));
         List<Judgement> judgements = STATIONS.judge(now, last);
         assertEquals(List.of("ten-times-off-last"), codes(judgements));
         assertEquals("/readings/bedDepths/1/depth", judgements.get(0).where().toString());

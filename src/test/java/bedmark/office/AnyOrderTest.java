@@ -51,7 +51,8 @@ class AnyOrderTest {
                     ranked = Offices.told(store);
                     assertTrue(store.rank().stream().anyMatch(zone -> zone.clashes() > 0), "there are conflicts");
                     assertTrue(store.rank().stream().anyMatch(RankedZone::clockWrong), "there are wrong clocks");
-                    assertTrue(store.registerVersions().size() > 1, "the register changes");
+                    assertTrue(first.keySet().stream().filter(name -> name.startsWith("registers")).count() > 1,
+                            "the register changes");
                 }
                 assertEquals(first, files);
                 assertEquals(ranked, Offices.told(store));

@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.document.Branch;
 import bedmark.engine.verdict.Level;
 import bedmark.journal.Digest;
+import bedmark.journal.Progress;
 import bedmark.survey.OfficeDeed;
 import java.util.Optional;
 import bedmark.survey.Assessor;
@@ -186,5 +187,33 @@ class OfficeStoreTest {
             }
         }
         assertEquals(1, told.stream().distinct().count());
+    }
+
+    @Test
+    void aPersonMayStopBetweenTwoPacksAndNothingIsLeftBehind() throws IOException {
+        List<Path> packs = List.of(packOf("round-2025-09"), packOf("round-2026-03"), packOf("round-under-way"));
+        Path office = folder.resolve("office");
+        try (OfficeStore store = Offices.trusting(office, tablet())) {
+            List<Received> received = store.receive(packs, "Ida Marsh", new Progress() {
+                private long told;
+
+                @Override
+                public void at(long done, long total) {
+                    told++;
+                }
+
+                @Override
+                public boolean cancelled() {
+                    return told > 0;
+                }
+            });
+            assertEquals(1, received.size());
+            assertEquals(1, store.packs().size());
+            try (Stream<Path> files = Files.list(office.resolve("packs"))) {
+                assertEquals(1, files.count());
+            }
+            assertEquals(3, store.receive(packs, "Ida Marsh", Progress.NONE).size());
+            assertEquals(3, store.packs().size());
+        }
     }
 }

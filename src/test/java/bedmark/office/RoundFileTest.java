@@ -17,6 +17,7 @@ import bedmark.office.register.RegisterDesk;
 import bedmark.pack.RoundFile;
 import bedmark.survey.Act;
 import bedmark.survey.OfficeDeed;
+import bedmark.survey.PlannedAction;
 import bedmark.survey.QueueState;
 import bedmark.survey.Register;
 import bedmark.survey.RoundIntake;
@@ -114,7 +115,10 @@ class RoundFileTest {
             assertTrue(register.conveyors().containsKey("C6"), "with its conveyor");
             assertEquals(List.of("2027-03", "2026-03"), head.branches("rounds").stream()
                     .map(round -> round.text("id").orElseThrow()).toList());
-            assertEquals(2, head.branches(RoundIntake.NOTES).size());
+            assertEquals("Renew the left seal", PlannedAction.of(register.transfer("TP-08").orElseThrow().document(),
+                    RoundIntake.ACTIONS).get(0).what());
+            assertEquals(1, register.transfers().values().stream().mapToInt(transfer -> transfer.document()
+                    .series(RoundIntake.NOTES).size()).sum());
             assertTrue(tablet.latestFinished("TP-08", Optional.empty()).isPresent(), "last results are here");
             assertEquals("round-file-older", assertThrows(Refused.class, () -> RoundIntake.acts(lean.with("createdAt",
                     "2026-09-01T08:00:00Z"), "f", tablet.register(), List.of(), id -> true)).defect().code());

@@ -23,7 +23,7 @@ import org.junit.jupiter.api.io.TempDir;
 /** Takes the pictures of every screen that {@code src/site/screens} shows, in both orientations. */
 class ScreenPicturesTest {
     private static final Path PAGE = Path.of("src", "site", "screens", "README.md");
-    private static final Path PICTURES = Path.of(System.getProperty("bedmark.pictures", PAGE.getParent().toString()));
+    private static final Path PICTURES = Path.of(System.getProperty("bedmark.screens", PAGE.getParent().toString()));
     private static final Path CAMERA = Path.of("target", "camera");
     private static final Path STICK = Path.of("target", "usb-stick");
     private static final Clock CLOCK = Clock.fixed(Instant.parse("2026-09-22T14:20:00Z"), ZoneOffset.ofHours(2));

@@ -14,7 +14,8 @@ import org.h2.api.ErrorCode;
 
 /** Where an office's tables lie: a folder's own database, or a server. Both have the same tables. */
 final class OfficeDatabase {
-    private static final String SETTINGS = ";WRITE_DELAY=0;DB_CLOSE_ON_EXIT=FALSE;TRACE_LEVEL_FILE=0;CACHE_SIZE=65536";
+    private static final String SETTINGS = ";WRITE_DELAY=0;DB_CLOSE_ON_EXIT=FALSE;TRACE_LEVEL_FILE=0;CACHE_SIZE=65536"
+            + ";LAZY_QUERY_EXECUTION=1";
     private static final String MIGRATIONS = "classpath:bedmark/index/office";
     private static final String SERVER = "jdbc:postgresql:";
 

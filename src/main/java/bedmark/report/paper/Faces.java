@@ -25,10 +25,7 @@ public final class Faces implements TextMeasure {
     private final Map<Face, EmbeddedFace> own = new EnumMap<>(Face.class);
     private Optional<EmbeddedFace> spare = Optional.empty();
     /** Widths as a share of the size: a page is tried at several sizes. */
-    private final Map<Word, Double> widths = new HashMap<>();
-
-    private record Word(String text, Face face) {
-    }
+    private final Map<Face, Map<String, Double>> widths = new EnumMap<>(Face.class);
 
     Faces(PDDocument document) {
         this.document = document;
@@ -88,10 +85,11 @@ public final class Faces implements TextMeasure {
 
     /** The width of a text (pt). */
     public double width(String text, Face face, double size) {
-        if (widths.size() > KEPT) {
-            widths.clear();
+        Map<String, Double> known = widths.computeIfAbsent(face, key -> new HashMap<>());
+        if (known.size() > KEPT) {
+            known.clear();
         }
-        return widths.computeIfAbsent(new Word(text, face), word -> width(text, face)) * size;
+        return known.computeIfAbsent(text, word -> width(word, face)) * size;
     }
 
     private double width(String text, Face face) {

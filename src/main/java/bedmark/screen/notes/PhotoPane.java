@@ -2,7 +2,6 @@ package bedmark.screen.notes;
 
 import bedmark.document.Branch;
 import bedmark.document.Defect;
-import bedmark.document.Refused;
 import bedmark.screen.Listening;
 import bedmark.screen.Workplace;
 import bedmark.screen.pad.NumericPad;
@@ -12,6 +11,7 @@ import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Icon;
 import bedmark.wording.Wording;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.HashMap;
 import java.util.List;
@@ -38,7 +38,7 @@ final class PhotoPane extends VBox {
     private final Runnable close;
     private final VBox content = new VBox();
     private final ScrollPane scroll = new ScrollPane(content);
-    private final Map<Path, Optional<Thumbnail>> thumbnails = new HashMap<>();
+    private final Map<Object, Optional<Thumbnail>> thumbnails = new HashMap<>();
     private double tile = 100;
     private boolean portrait;
 
@@ -143,7 +143,7 @@ final class PhotoPane extends VBox {
                 PhotoTile one = new PhotoTile("shot-" + i, wording.text("notes.attach"),
                         wording.text("notes.attach") + ": " + shot.getFileName(), tile, tile * RATIO,
                         () -> model.attach(shot));
-                show(one, shot);
+                show(one, shot, () -> Files.newInputStream(shot));
                 tiles.getChildren().add(one);
             }
             content.getChildren().add(tiles);
@@ -165,17 +165,8 @@ final class PhotoPane extends VBox {
         String line = caption.isEmpty() ? wording.text("notes.no-caption") : caption;
         PhotoTile one = new PhotoTile("photo-" + model.photos().indexOf(photo), line, wording.text("notes.photo", line),
                 tile, tile * RATIO, () -> open(photo, id, caption));
-        file(photo).ifPresent(path -> show(one, path));
+        workplace.store().photo(photo).ifPresent(kept -> show(one, photo.text("file").orElse(""), kept::open));
         return one;
-    }
-
-    private Optional<Path> file(Branch photo) {
-        try {
-            return Optional.of(workplace.store().photoFile(photo));
-        } catch (Refused e) {
-            // Its tile keeps the camera sign; checking the store names the file that is missing.
-            return Optional.empty();
-        }
     }
 
     private void open(Branch photo, String id, String caption) {
@@ -196,23 +187,23 @@ final class PhotoPane extends VBox {
             }
         });
         edit.accept(editor);
-        file(photo).ifPresent(path -> workplace.longWork().execute(() -> {
-            Optional<Thumbnail> large = Thumbnail.of(path, PhotoEditor.SIDE);
+        workplace.store().photo(photo).ifPresent(kept -> workplace.longWork().execute(() -> {
+            Optional<Thumbnail> large = Thumbnail.of(kept::open, PhotoEditor.SIDE);
             workplace.screen().execute(() -> editor.show(large));
         }));
         editor.begin();
     }
 
     /** Decoded once beside the screen, shown as soon as it is there. */
-    private void show(PhotoTile one, Path file) {
-        if (thumbnails.containsKey(file)) {
-            one.show(thumbnails.get(file));
+    private void show(PhotoTile one, Object known, Thumbnail.Source photo) {
+        if (thumbnails.containsKey(known)) {
+            one.show(thumbnails.get(known));
             return;
         }
         workplace.longWork().execute(() -> {
-            Optional<Thumbnail> found = Thumbnail.of(file, tile * 2);
+            Optional<Thumbnail> found = Thumbnail.of(photo, tile * 2);
             workplace.screen().execute(() -> {
-                thumbnails.put(file, found);
+                thumbnails.put(known, found);
                 one.show(found);
             });
         });

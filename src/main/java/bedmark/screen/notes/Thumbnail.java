@@ -1,11 +1,10 @@
 package bedmark.screen.notes;
 
+import bedmark.document.Refused;
 import bedmark.photo.Orientation;
 import bedmark.photo.PhotoFacts;
 import java.io.IOException;
 import java.io.InputStream;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.Optional;
 import javafx.scene.image.Image;
 import javafx.scene.image.ImageView;
@@ -16,6 +15,12 @@ import javafx.scene.image.ImageView;
  * @param orientation as the camera was held
  */
 record Thumbnail(Image image, Orientation orientation) {
+
+    /** Where a photo is read from, as often as asked: a camera's file, or the store, which may keep it sealed. */
+    @FunctionalInterface
+    interface Source {
+        InputStream open() throws IOException;
+    }
 
     /** The picture as it was seen, no larger than a box (px). */
     ImageView upright(double width, double height) {
@@ -36,17 +41,24 @@ record Thumbnail(Image image, Orientation orientation) {
      *
      * @param side the longer side of the small picture (px)
      */
-    static Optional<Thumbnail> of(Path file, double side) {
+    static Optional<Thumbnail> of(Source photo, double side) {
         try {
-            if (PhotoFacts.doubt(file).isPresent()) {
-                return Optional.empty();
+            try (InputStream in = photo.open()) {
+                if (PhotoFacts.doubt("", in).isPresent()) {
+                    return Optional.empty();
+                }
             }
-            try (InputStream in = Files.newInputStream(file)) {
+            PhotoFacts facts;
+            try (InputStream in = photo.open()) {
+                facts = PhotoFacts.of(in);
+            }
+            try (InputStream in = photo.open()) {
                 Image image = new Image(in, side, side, true, true);
                 return image.isError() || image.getWidth() < 1 ? Optional.empty()
-                        : Optional.of(new Thumbnail(image, PhotoFacts.of(file).orientation()));
+                        : Optional.of(new Thumbnail(image, facts.orientation()));
             }
-        } catch (IOException e) {
+        } catch (IOException | Refused e) {
+            // Its tile keeps the camera sign; checking the store names a photo that is damaged or missing.
             return Optional.empty();
         }
     }

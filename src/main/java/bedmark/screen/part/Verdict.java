@@ -20,6 +20,8 @@ public record Verdict(LevelShape level, String levelWord, String sentence, Strin
                       List<Figure> figures, Optional<String> advice) {
     /** How many figures a glance takes in. */
     public static final int FIGURES = 4;
+    /** How many remarks stand in one line. */
+    public static final int REMARKS = 2;
 
     /**
      * A remark, with the shape of the level that it is about, where it is about one.
@@ -45,8 +47,8 @@ public record Verdict(LevelShape level, String levelWord, String sentence, Strin
         Objects.requireNonNull(sure);
         figures = List.copyOf(figures);
         Objects.requireNonNull(advice);
-        if (figures.size() > FIGURES) {
-            throw new IllegalArgumentException("a glance takes in four figures");
+        if (figures.size() > FIGURES || remarks.size() > REMARKS) {
+            throw new IllegalArgumentException("a glance takes in four figures and two remarks");
         }
     }
 }

@@ -19,6 +19,7 @@ public final class VerdictBlock extends VBox {
     private final LevelGlyph glyph = new LevelGlyph(LevelShape.INCOMPLETE);
     private final Label sentence = Labels.wrapped("sentence", "");
     private final Label sure = Labels.wrapped("sure", "");
+    private final List<RemarkLine> remarkLines = Stream.generate(RemarkLine::new).limit(Verdict.REMARKS).toList();
     private final FlowPane remarks = new FlowPane();
     private final Label advice = Labels.wrapped("advice", "");
     private final List<FigureBlock> figures = Stream.generate(FigureBlock::new).limit(Verdict.FIGURES).toList();
@@ -36,6 +37,7 @@ public final class VerdictBlock extends VBox {
         HBox.setHgrow(sentence, Priority.ALWAYS);
         sentence.setMaxWidth(Double.MAX_VALUE);
         remarks.getStyleClass().add("remarks");
+        remarks.getChildren().addAll(remarkLines);
         remarks.managedProperty().bind(remarks.visibleProperty());
         HBox foot = new HBox(advice);
         foot.getStyleClass().add("foot");
@@ -60,24 +62,15 @@ public final class VerdictBlock extends VBox {
         return grid;
     }
 
-    private static HBox remark(Verdict.Remark remark) {
-        HBox line = new HBox();
-        line.getStyleClass().add("remark");
-        line.setAlignment(Pos.CENTER_LEFT);
-        remark.level().ifPresent(level -> line.getChildren().add(new LevelGlyph(level)));
-        line.getChildren().add(Labels.label("words", remark.words()));
-        return line;
-    }
-
     public void show(Verdict verdict) {
         if (verdict.equals(shown)) {
             return;
         }
         boolean other = shown == null || shown.level() != verdict.level();
-        if (shown == null || !shown.remarks().equals(verdict.remarks())) {
-            remarks.getChildren().setAll(verdict.remarks().stream().map(VerdictBlock::remark).toList());
-            remarks.setVisible(!verdict.remarks().isEmpty());
+        for (int i = 0; i < remarkLines.size(); i++) {
+            remarkLines.get(i).show(verdict.remarks().stream().skip(i).findFirst());
         }
+        remarks.setVisible(!verdict.remarks().isEmpty());
         shown = verdict;
         glyph.levelProperty().set(verdict.level());
         glyph.setAccessibleText(verdict.levelWord());

@@ -118,7 +118,9 @@ final class EntryPane extends StackPane {
             pad.close();
             getChildren().clear();
         } else if (slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot) {
-            getChildren().setAll(numericPad);
+            if (!getChildren().equals(List.of(numericPad))) {
+                getChildren().setAll(numericPad);
+            }
             pad.open(setup(slot), model.editable(), model.typedProperty().get().isEmpty());
         } else if (slot instanceof Slot.TextSlot text && !SlotWords.isMaterial(slot)) {
             pad.close();

@@ -35,6 +35,7 @@ final class FormPane extends VBox {
     private List<RowPlace> rows = List.of();
     private Optional<RowPlace> inHand = Optional.empty();
     private boolean filling;
+    private boolean upright;
 
     /** @param large whether large keys take the room: one row is shown, and what is said of it stands elsewhere */
     FormPane(ZoneModel model, Wording wording, Listening listening, boolean large) {
@@ -60,9 +61,9 @@ final class FormPane extends VBox {
             VBox.setVgrow(scroll, Priority.ALWAYS);
             getChildren().addAll(header, scroll, caution);
         }
+        sceneProperty().addListener((property, before, now) -> fill());
         listening.to(model.rowsProperty(), this::layOut);
         listening.onChange(model.keptProperty(), kept -> rows.forEach(RowPlace::update));
-        listening.onChange(model.surveyProperty(), survey -> typed());
         listening.onChange(model.typedProperty(), typed -> typed());
         listening.onChange(model.noteProperty(), note -> typed());
         listening.onChange(model.beltStateProperty(), state -> sayCaution());
@@ -90,6 +91,7 @@ final class FormPane extends VBox {
             }
             RowPlace place = rows.stream().filter(known -> known.row().equals(row)).findFirst()
                     .orElseGet(() -> new RowPlace(row, model, wording, large));
+            place.turned(upright);
             made.add(place);
             lines.add(place);
         }
@@ -109,12 +111,24 @@ final class FormPane extends VBox {
 
     private void fillSome() {
         filling = false;
+        if (getScene() == null || getScene().getWindow() == null || !getScene().getWindow().isShowing()) {
+            return;
+        }
         List<RowPlace> next = rows.stream().filter(row -> !row.isBuilt()).limit(AT_A_TIME).toList();
-        next.forEach(RowPlace::build);
+        next.forEach(row -> {
+            row.build();
+            row.applyCss();
+        });
         if (!next.isEmpty()) {
             inHand.ifPresent(this::reveal);
             fill();
         }
+    }
+
+    /** Told when the tablet is turned. */
+    void turned(boolean portrait) {
+        upright = portrait;
+        rows.forEach(row -> row.turned(portrait));
     }
 
     private String title(Section section) {
@@ -162,7 +176,8 @@ final class FormPane extends VBox {
 
     /** Brings the row in sight with the one before it where there is room for both; no row is cut at the top. */
     private void reveal(RowPlace row) {
-        applyCss();
+        // Only this row can have changed its style; styling the whole form anew would cost more than the key's work.
+        row.applyCss();
         layout();
         double room = scroll.getViewportBounds().getHeight();
         double all = list.getBoundsInLocal().getHeight();

@@ -10,9 +10,10 @@ import bedmark.form.Judgement;
 import bedmark.form.StationsField;
 import bedmark.survey.Register;
 import java.util.Comparator;
+import java.util.IdentityHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
-import java.util.stream.Stream;
 
 /**
  * Judges the answers of one transfer point by its form, by what the last survey found there, and, where that holds no
@@ -26,6 +27,9 @@ final class Judging {
     private final FieldForm form;
     private final Branch last;
     private final Branch expected;
+    /** What was found in the document that was judged last: each cell of a table asks for its whole field. */
+    private final Map<Field, List<Judgement>> found = new IdentityHashMap<>();
+    private Branch judged = Branch.EMPTY;
 
     /** What keeps a survey from being completed, and the place to mend it at. */
     record Obstacle(Pointer where, Note note) {
@@ -58,16 +62,24 @@ final class Judging {
 
     /** What there is to say about the answer of a cell: an impossibility before a doubt. */
     Optional<Note> first(Branch document, Slot slot) {
-        return judgements(document, slot.field())
+        return judgements(document, slot.field()).stream()
                 .filter(judgement -> judgement.where().holds(slot.where()) || slot.where().holds(judgement.where()))
                 .min(Comparator.comparing(judgement -> judgement instanceof Judgement.Doubt))
                 .map(judgement -> new Note.Judged(judgement, slot.field()));
     }
 
-    private Stream<Judgement> judgements(Branch document, Field field) {
-        List<Judgement> found = field.judge(document, last);
-        return found.isEmpty() && field.answer(last).isEmpty()
-                ? field.judge(document, expected).stream().map(Judging::byRegister) : found.stream();
+    private List<Judgement> judgements(Branch document, Field field) {
+        if (judged != document) {
+            found.clear();
+            judged = document;
+        }
+        return found.computeIfAbsent(field, asked -> judge(document, asked));
+    }
+
+    private List<Judgement> judge(Branch document, Field field) {
+        List<Judgement> byLast = field.judge(document, last);
+        return byLast.isEmpty() && field.answer(last).isEmpty()
+                ? field.judge(document, expected).stream().map(Judging::byRegister).toList() : byLast;
     }
 
     private static Judgement byRegister(Judgement judgement) {
@@ -81,18 +93,18 @@ final class Judging {
     }
 
     /** The first thing that keeps the survey from being completed. */
-    Optional<Obstacle> obstacle(Branch document, Optional<Assessment> found) {
+    Optional<Obstacle> obstacle(Branch document, Optional<Assessment> assessment) {
         Optional<Obstacle> refused = form.refusals(document).stream().findFirst()
                 .flatMap(refusal -> form.fieldAt(refusal.where()).map(field ->
                         new Obstacle(refusal.where(), new Note.Judged(refusal, field))));
         return refused.or(() -> form.gaps(document).stream().findFirst()
                         .map(field -> new Obstacle(field.where(), new Note.Gap(field))))
-                .or(() -> engineGap(found));
+                .or(() -> engineGap(assessment));
     }
 
     /** A reading that the verdict waits for; what the register lacks the person here cannot give. */
-    private Optional<Obstacle> engineGap(Optional<Assessment> found) {
-        return found.stream().flatMap(assessment -> assessment.missingRequired().stream()).map(Pointer::parse)
+    private Optional<Obstacle> engineGap(Optional<Assessment> known) {
+        return known.stream().flatMap(assessment -> assessment.missingRequired().stream()).map(Pointer::parse)
                 .flatMap(where -> form.fieldAt(where).stream()
                         .map(field -> new Obstacle(where, new Note.Gap(field)))).findFirst();
     }

@@ -27,6 +27,15 @@ final class PicturePane extends StackPane {
     private final PictureTools tools;
     private Optional<Branch> pulled = Optional.empty();
     private Optional<AskedSpeed> asked = Optional.empty();
+    private Optional<Drawn> drawn = Optional.empty();
+
+    /** What the picture was drawn of; a key that changes none of it draws nothing. */
+    private record Drawn(Branch document, ZoneModel.Outcome outcome, Optional<Integer> line, double speed) {
+        private boolean is(Drawn other) {
+            return document == other.document && outcome == other.outcome && line.equals(other.line)
+                    && Double.compare(speed, other.speed) == 0;
+        }
+    }
 
     PicturePane(ZoneModel model, Wording wording, Density density) {
         this.model = model;
@@ -59,8 +68,11 @@ final class PicturePane extends StackPane {
 
     /** Shows the survey as it stands, unless a finger holds the bed. */
     void refresh() {
-        if (pulled.isEmpty()) {
+        Drawn now = new Drawn(model.surveyProperty().get(), model.outcomeProperty().get(),
+                BedLines.lineOf(model.active()), asked.map(AskedSpeed::speed).orElse(0.0));
+        if (pulled.isEmpty() && drawn.filter(now::is).isEmpty()) {
             view.show(sketch(), snap());
+            drawn = Optional.of(now);
         }
         tools.offer(model.open(), heldLine().isPresent(), found().filter(known ->
                 known.get(Result.BELT_SPEED).isPresent() && !known.profile().isEmpty()).isPresent());
@@ -153,6 +165,7 @@ final class PicturePane extends StackPane {
 
         private void follow(Branch seen, int line) {
             pulled = Optional.of(seen);
+            drawn = Optional.empty();
             view.show(sketcher.sketch(seen, found(), Optional.of(line)), snap());
         }
 

@@ -11,6 +11,9 @@ final class RowPlace extends StackPane {
     private final Wording wording;
     private final boolean quiet;
     private Optional<RowView> view = Optional.empty();
+    private boolean upright;
+    private double widthAsked = Double.NaN;
+    private double heightKnown;
 
     /** @param quiet whether what is to be said of the row is said elsewhere */
     RowPlace(SlotRow row, ZoneModel model, Wording wording, boolean quiet) {
@@ -37,10 +40,33 @@ final class RowPlace extends StackPane {
     RowView built() {
         if (view.isEmpty()) {
             view = Optional.of(new RowView(row, model, wording, quiet));
+            view.orElseThrow().turned(upright);
             getStyleClass().remove("to-come");
             getChildren().setAll(view.orElseThrow());
         }
         return view.orElseThrow();
+    }
+
+    /** Told when the tablet is turned. */
+    void turned(boolean portrait) {
+        upright = portrait;
+        view.ifPresent(row -> row.turned(portrait));
+    }
+
+    @Override
+    public void requestLayout() {
+        widthAsked = Double.NaN;
+        super.requestLayout();
+    }
+
+    /** A key changes one row; the list asks all of them how high they are. */
+    @Override
+    protected double computePrefHeight(double width) {
+        if (width != widthAsked) {
+            heightKnown = super.computePrefHeight(width);
+            widthAsked = width;
+        }
+        return heightKnown;
     }
 
     /** Shows what the survey holds now, where the row is built. */

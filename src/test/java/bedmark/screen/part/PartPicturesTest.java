@@ -237,7 +237,7 @@ class PartPicturesTest {
         Scene scene = Glass.show(root, Light.DAY, density, width, height);
         for (Labeled label : labels(root)) {
             Text shown = (Text) label.lookup(".text");
-            assertEquals(label.getText().replace(" ", ""), shown.getText().replaceAll("[ \n]", ""));
+            assertEquals(label.getText().replaceAll("[ \n]", ""), shown.getText().replaceAll("[ \n]", ""));
             Bounds place = label.localToScene(label.getLayoutBounds());
             assertTrue(place.getMinX() >= 0 && place.getMinY() >= 0 && place.getMaxX() <= width
                     && place.getMaxY() <= height, () -> label.getText() + " at " + place);

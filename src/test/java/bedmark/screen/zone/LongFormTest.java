@@ -30,6 +30,7 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.UUID;
 import javafx.scene.Scene;
+import javafx.scene.layout.StackPane;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -71,7 +72,7 @@ class LongFormTest {
         return Glass.on(() -> {
             FormPane pane = new FormPane(model(LongForms.of(fields)),
                     new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC), new Listening(), false);
-            Glass.show(pane, Light.DAY, Density.standard(), 490, 300);
+            Glass.show(new StackPane(pane), Light.DAY, Density.standard(), 490, 300);
             return pane;
         });
     }
@@ -106,7 +107,7 @@ class LongFormTest {
             ZoneModel model = model(LongForms.of(200));
             FormPane pane = new FormPane(model, new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC),
                     new Listening(), false);
-            Scene scene = Glass.show(pane, Light.DAY, Density.standard(), 490, 300);
+            Scene scene = Glass.show(new StackPane(pane), Light.DAY, Density.standard(), 490, 300);
             model.activate(model.slots().get(180));
             FieldBox box = pane.activeBox().orElseThrow();
             assertTrue(box.activeProperty().get());

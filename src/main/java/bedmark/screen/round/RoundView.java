@@ -125,7 +125,8 @@ public final class RoundView extends SidedScreen {
             list.getChildren().add(stop(row));
         }
         if (list.getChildren().isEmpty()) {
-            Label nothing = new Label(wording.text("screen.round.nothing-found"));
+            Label nothing = new Label(wording.text(model.rowsProperty().get().isEmpty() ? "first.no-stops"
+                    : "screen.round.nothing-found"));
             nothing.setWrapText(true);
             list.getChildren().add(nothing);
         }

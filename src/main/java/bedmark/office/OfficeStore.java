@@ -50,7 +50,7 @@ import java.util.function.Function;
  */
 public final class OfficeStore implements AutoCloseable {
     private static final String LOCK = "store.lock";
-    private static final String PACKS = "packs";
+    static final String PACKS = "packs";
     private static final String PASSING = "passing";
     private static final String OFFICE = "office.json";
     private static final int JUDGED_AT_ONCE = 500;
@@ -69,7 +69,7 @@ public final class OfficeStore implements AutoCloseable {
     private final AtomicBoolean closed = new AtomicBoolean();
 
     private OfficeStore(Path folder, Optional<String> url, OfficeOptions options, Desk desk, Closeable lock,
-                        boolean afresh) throws IOException {
+                        String index, boolean afresh) throws IOException {
         this.folder = folder;
         this.options = options;
         this.desk = desk;
@@ -84,7 +84,7 @@ public final class OfficeStore implements AutoCloseable {
         Effects effects = new Effects(shelf, options.limits(), this::minutes);
         this.books = url.isPresent()
                 ? new ServerBooks(url.get(), options, device.id(), effects, () -> minutes = new Minutes())
-                : FolderBooks.open(folder, options, device.id(), effects, afresh);
+                : FolderBooks.open(folder, index, options, device.id(), effects, afresh);
         this.judge = new Judge(this::version);
     }
 
@@ -95,7 +95,7 @@ public final class OfficeStore implements AutoCloseable {
      *                 store of a tablet, {@code store-…} where the folder can't be used
      */
     public static OfficeStore open(Path folder, OfficeOptions options) {
-        return open(folder, Optional.empty(), options, false);
+        return open(folder, Optional.empty(), options, FolderBooks.INDEX, false);
     }
 
     /**
@@ -110,12 +110,12 @@ public final class OfficeStore implements AutoCloseable {
         if (!OfficeTables.isServer(url)) {
             throw new IllegalArgumentException("no server");
         }
-        return open(own, Optional.of(url), options, false);
+        return open(own, Optional.of(url), options, FolderBooks.INDEX, false);
     }
 
     /** As {@link #open(Path, OfficeOptions)}, with the tables made anew from the journal and the packs. */
     public static OfficeStore rebuild(Path folder, OfficeOptions options) {
-        return open(folder, Optional.empty(), options, true);
+        return open(folder, Optional.empty(), options, FolderBooks.INDEX, true);
     }
 
     /** Whether a folder holds an office store. */
@@ -128,11 +128,17 @@ public final class OfficeStore implements AutoCloseable {
         return OfficeTables.isServer(text);
     }
 
-    private static OfficeStore open(Path folder, Optional<String> url, OfficeOptions options, boolean afresh) {
+    /** An office with its tables made anew in a folder of another name, beside those in use. */
+    static OfficeStore beside(Path folder, String index, OfficeOptions options) {
+        return open(folder, Optional.empty(), options, index, true);
+    }
+
+    private static OfficeStore open(Path folder, Optional<String> url, OfficeOptions options, String index,
+                                    boolean afresh) {
         Path home = folder.toAbsolutePath().normalize();
         Desk desk = new Desk("bedmark-office");
         try {
-            return desk.call(() -> openLocked(home, url, options, desk, afresh));
+            return desk.call(() -> openLocked(home, url, options, desk, index, afresh));
         } catch (RuntimeException e) {
             desk.close();
             throw refused(e);
@@ -140,7 +146,7 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     private static OfficeStore openLocked(Path folder, Optional<String> url, OfficeOptions options, Desk desk,
-                                          boolean afresh) {
+                                          String index, boolean afresh) {
         FileLayer files = options.files();
         try {
             if (files.exists(folder.resolve(DeviceFile.NAME)) && !files.exists(folder.resolve(OFFICE))) {
@@ -150,7 +156,7 @@ public final class OfficeStore implements AutoCloseable {
             Closeable lock = files.lock(folder.resolve(LOCK))
                     .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
             try {
-                return new OfficeStore(folder, url, options, desk, lock, afresh);
+                return new OfficeStore(folder, url, options, desk, lock, index, afresh);
             } catch (IOException | RuntimeException e) {
                 lock.close();
                 throw e;
@@ -320,7 +326,7 @@ public final class OfficeStore implements AutoCloseable {
         });
     }
 
-    private void judgeWaiting(Progress progress) {
+    void judgeWaiting(Progress progress) {
         long total = ask(OfficeTables::countWaiting);
         long done = 0;
         while (done < total && !progress.cancelled()) {

@@ -32,7 +32,6 @@ import java.io.IOException;
 import java.lang.ref.SoftReference;
 import java.nio.file.Path;
 import java.time.ZonedDateTime;
-import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -63,6 +62,7 @@ public final class OfficeStore implements AutoCloseable {
     private final Device device;
     private final Books books;
     private final Judge judge;
+    private final Results results;
     private final PackPhotos photos;
     private Minutes minutes = new Minutes();
     private SoftReference<List<ZoneRow>> rows = new SoftReference<>(null);
@@ -86,6 +86,7 @@ public final class OfficeStore implements AutoCloseable {
                 ? new ServerBooks(url.get(), options, device.id(), effects, () -> minutes = new Minutes())
                 : FolderBooks.open(folder, index, options, device.id(), effects, afresh);
         this.judge = new Judge(this::version);
+        this.results = new Results(judge, this::minutes);
     }
 
     /**
@@ -336,7 +337,7 @@ public final class OfficeStore implements AutoCloseable {
                 tables.alone();
                 List<ZoneId> zones = tables.waiting(JUDGED_AT_ONCE);
                 Map<ZoneId, Optional<Verdict>> verdicts = new LinkedHashMap<>();
-                latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
+                results.latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
                         sides.stream().min(Judge.WORST_FIRST).map(worst -> Judge.verdict(worst.assessment()))));
                 tables.judge(verdicts);
                 rows.clear();
@@ -349,61 +350,25 @@ public final class OfficeStore implements AutoCloseable {
         }
     }
 
-    /** Each zone's latest result, and what clashes with it, by the registers that they were made with. */
-    private Map<ZoneId, List<JudgedZone>> latest(OfficeTables tables, Collection<ZoneId> zones) {
-        Map<ZoneId, MergedZone> merged = new LinkedHashMap<>(Merge.zones(tables.copies(zones),
-                minutes(tables).setAside()));
-        List<Copy> sides = merged.values().stream().flatMap(zone -> zone.latest().stream()).toList();
-        Map<ZoneId, List<JudgedZone>> judged = new LinkedHashMap<>();
-        zones.forEach(zone -> judged.put(zone, new ArrayList<>()));
-        judged(tables, sides, copy -> copy.origin().register()).forEach(one -> judged.get(one.zone()).add(one));
-        return judged;
-    }
-
-    private List<JudgedZone> judged(OfficeTables tables, List<Copy> copies, Function<Copy, String> register) {
-        Map<String, List<Copy>> drives = new HashMap<>();
-        Merge.zones(tables.companions(copies), minutes(tables).setAside()).values().forEach(zone -> zone.results()
-                .forEach(copy -> drives.computeIfAbsent(drive(copy), key -> new ArrayList<>()).add(copy)));
-        Set<String> wanted = new HashSet<>();
-        copies.forEach(copy -> {
-            wanted.add(copy.digest());
-            drives.getOrDefault(drive(copy), List.of()).forEach(other -> wanted.add(other.digest()));
-        });
-        Map<String, Survey> documents = documents(tables, wanted);
-        return copies.stream().flatMap(copy -> judge.judge(copy, register.apply(copy),
-                drives.getOrDefault(drive(copy), List.of()), documents).stream()).toList();
-    }
-
-    private static String drive(Copy copy) {
-        return copy.zone().plant() + '\n' + copy.round() + '\n' + copy.origin().conveyor();
-    }
-
-    private static Map<String, Survey> documents(OfficeTables tables, Collection<String> digests) {
-        Map<String, Survey> documents = new HashMap<>();
-        tables.contents(digests).forEach((digest, text) ->
-                documents.put(digest, new Survey(JsonReader.read(text).root())));
-        return documents;
-    }
-
     /**
      * A zone's latest result by the register that it was made with; the worst, where contents clash.
      *
      * @return nothing where it was never inspected, or can't be judged
      */
     public Optional<JudgedZone> judged(ZoneId zone) {
-        return ask(tables -> latest(tables, List.of(zone)).get(zone).stream().min(Judge.WORST_FIRST));
+        return ask(tables -> results.latest(tables, List.of(zone)).get(zone).stream().min(Judge.WORST_FIRST));
     }
 
     /** The same result by the register that holds today. */
     public Optional<JudgedZone> judgedToday(ZoneId zone) {
-        return ask(tables -> tables.plant(zone.plant()).flatMap(today -> judged(tables,
+        return ask(tables -> tables.plant(zone.plant()).flatMap(today -> results.judged(tables,
                 Merge.zone(zone, tables.copies(List.of(zone)), minutes(tables).setAside()).latest(),
                 copy -> today.register()).stream().min(Judge.WORST_FIRST)));
     }
 
     /** All results of a zone that count, in time order, each by the register that it was made with. */
     public List<JudgedZone> history(ZoneId zone) {
-        return ask(tables -> judged(tables, Merge.zone(zone, tables.copies(List.of(zone)),
+        return ask(tables -> results.judged(tables, Merge.zone(zone, tables.copies(List.of(zone)),
                 minutes(tables).setAside()).results(), copy -> copy.origin().register()));
     }
 
@@ -418,7 +383,7 @@ public final class OfficeStore implements AutoCloseable {
         List<JudgedZone> counted = history(zone);
         Set<String> digests = new HashSet<>();
         counted.forEach(one -> digests.add(one.copy().digest()));
-        List<JudgedZone> replaced = ask(tables -> judged(tables, tables.copies(List.of(zone)).stream()
+        List<JudgedZone> replaced = ask(tables -> results.judged(tables, tables.copies(List.of(zone)).stream()
                 .filter(copy -> copy.result() && !digests.contains(copy.digest())).toList(),
                 copy -> copy.origin().register()));
         return ZoneTrend.of(zone, counted, replaced);
@@ -428,14 +393,14 @@ public final class OfficeStore implements AutoCloseable {
     List<FlatRow> rows(List<String> digests) {
         return ask(tables -> {
             Map<String, Copy> copies = tables.copiesOf(digests);
-            Map<String, Survey> documents = documents(tables, digests);
+            Map<String, Survey> documents = Results.documents(tables, digests);
             List<Copy> ordered = digests.stream().map(copies::get).toList();
             Set<String> counting = new HashSet<>();
             Merge.zones(tables.copies(ordered.stream().map(Copy::zone).distinct().toList()),
                     minutes(tables).setAside()).values().forEach(zone -> zone.visits().forEach(copy ->
                     counting.add(copy.digest())));
             Map<String, JudgedZone> judged = new HashMap<>();
-            judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
+            results.judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
                     .forEach(one -> judged.put(one.copy().digest(), one));
             return ordered.stream().map(copy -> new FlatRow(copy, counting.contains(copy.digest()),
                     documents.get(copy.digest()), judge.register(copy.origin().register()),
@@ -450,7 +415,7 @@ public final class OfficeStore implements AutoCloseable {
 
     /** A zone's surveys by their digests, with all sides of every clash. */
     public Map<String, Survey> surveys(Collection<String> digests) {
-        return ask(tables -> documents(tables, digests));
+        return ask(tables -> Results.documents(tables, digests));
     }
 
     /** The zone with that id, or with that tag where there is one alone. */

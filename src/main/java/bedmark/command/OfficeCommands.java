@@ -20,6 +20,8 @@ final class OfficeCommands {
                 .addSubcommand(new OfficeImportRegisterCommand(surroundings))
                 .addSubcommand(new OfficeExportRegisterCommand(surroundings))
                 .addSubcommand(new OfficeRoundCommand(surroundings))
-                .addSubcommand(new OfficeReportCommand(surroundings));
+                .addSubcommand(new OfficeReportCommand(surroundings))
+                .addSubcommand(new OfficeCheckCommand(surroundings))
+                .addSubcommand(new OfficeRebuildCommand(surroundings));
     }
 }

@@ -12,6 +12,7 @@ import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.util.Map;
+import java.util.TreeMap;
 
 /** Writes documents: the same tree always gives the same bytes, on every machine. */
 public final class JsonWriter {
@@ -31,6 +32,17 @@ public final class JsonWriter {
         return write(node, true);
     }
 
+    /** As {@link #compact(Node)}, with the keys of every object in their order. */
+    static byte[] sorted(Node node) {
+        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+        try (JsonGenerator generator = FACTORY.createGenerator(bytes)) {
+            put(generator, node, true);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+        return bytes.toByteArray();
+    }
+
     private static byte[] write(Node node, boolean indented) {
         ByteArrayOutputStream bytes = new ByteArrayOutputStream();
         try (JsonGenerator generator = FACTORY.createGenerator(bytes)) {
@@ -41,7 +53,7 @@ public final class JsonWriter {
                         .withObjectEmptySeparator("").withArrayEmptySeparator(""))
                         .withObjectIndenter(indenter).withArrayIndenter(indenter));
             }
-            put(generator, node);
+            put(generator, node, false);
             if (indented) {
                 generator.writeRaw('\n');
             }
@@ -51,18 +63,19 @@ public final class JsonWriter {
         return bytes.toByteArray();
     }
 
-    private static void put(JsonGenerator generator, Node node) throws IOException {
+    private static void put(JsonGenerator generator, Node node, boolean sorted) throws IOException {
         if (node instanceof Branch branch) {
             generator.writeStartObject();
-            for (Map.Entry<String, Node> member : branch.members().entrySet()) {
+            Map<String, Node> members = sorted ? new TreeMap<>(branch.members()) : branch.members();
+            for (Map.Entry<String, Node> member : members.entrySet()) {
                 generator.writeFieldName(member.getKey());
-                put(generator, member.getValue());
+                put(generator, member.getValue(), sorted);
             }
             generator.writeEndObject();
         } else if (node instanceof Node.Series series) {
             generator.writeStartArray();
             for (Node item : series.items()) {
-                put(generator, item);
+                put(generator, item, sorted);
             }
             generator.writeEndArray();
         } else if (node instanceof Node.Text text) {

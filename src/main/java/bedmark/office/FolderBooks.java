@@ -9,6 +9,8 @@ import bedmark.journal.Digest;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
 import bedmark.journal.Journal;
+import bedmark.journal.JournalProof;
+import bedmark.journal.JournalVisitor;
 import bedmark.journal.Mark;
 import bedmark.journal.Place;
 import bedmark.journal.Replay;
@@ -34,6 +36,7 @@ final class FolderBooks implements Books {
     private static final String MARK = "mark";
 
     private final Path folder;
+    private final Path index;
     private final OfficeOptions options;
     private final FileLayer files;
     private final UUID device;
@@ -41,19 +44,23 @@ final class FolderBooks implements Books {
     private final List<Defect> found = new ArrayList<>();
     private Optional<OfficeTables> tables = Optional.empty();
     private Optional<Journal> journal = Optional.empty();
+    private final boolean beside;
     private boolean rebuilt;
 
-    private FolderBooks(Path folder, OfficeOptions options, UUID device, Effect effect) {
+    private FolderBooks(Path folder, String index, OfficeOptions options, UUID device, Effect effect) {
         this.folder = folder;
+        this.index = folder.resolve(index);
+        this.beside = !index.equals(INDEX);
         this.options = options;
         this.files = options.files();
         this.device = device;
         this.effect = effect;
     }
 
-    static FolderBooks open(Path folder, OfficeOptions options, UUID device, Effect effect, boolean afresh)
-            throws IOException {
-        FolderBooks books = new FolderBooks(folder, options, device, effect);
+    /** @param index the name of the folder of the tables */
+    static FolderBooks open(Path folder, String index, OfficeOptions options, UUID device, Effect effect,
+                            boolean afresh) throws IOException {
+        FolderBooks books = new FolderBooks(folder, index, options, device, effect);
         try {
             books.open(afresh);
             return books;
@@ -64,22 +71,52 @@ final class FolderBooks implements Books {
     }
 
     private void open(boolean afresh) throws IOException {
-        files.createFolder(folder.resolve(INDEX));
+        files.createFolder(index);
         if (afresh) {
             drop();
         }
         Optional<Mark> mark = Optional.empty();
         try {
-            tables = Optional.of(OfficeTables.of(folder.resolve(INDEX)));
+            tables = Optional.of(OfficeTables.of(index));
             mark = tables().setting(MARK).map(FolderBooks::readMark);
         } catch (OfficeBroken | IllegalArgumentException e) {
+            rebuilt = true;
             drop();
-            tables = Optional.of(OfficeTables.of(folder.resolve(INDEX)));
+            tables = Optional.of(OfficeTables.of(index));
+        }
+        if (beside) {
+            readAll();
+            return;
         }
         Journal opened = Journal.open(folder.resolve(JOURNAL), files, SEGMENT_BYTES, mark, options.progress(),
                 new CatchUp());
         journal = Optional.of(opened);
         found.addAll(opened.found());
+        if (rebuilt) {
+            found.add(Defect.in(index.toString(), "office-tables-broken"));
+        }
+    }
+
+    /** Takes in the whole journal without a byte of it changed, to be compared; nothing can be kept then. */
+    private void readAll() throws IOException {
+        CatchUp all = new CatchUp();
+        JournalProof proof = JournalProof.of(folder.resolve(JOURNAL), files, Optional.empty(), new JournalVisitor() {
+            @Override
+            public void entry(long sequence, Place place, byte[] payload) {
+                all.entry(sequence, place, payload);
+            }
+
+            @Override
+            public void flaw(Defect flaw) {
+                found.add(flaw);
+            }
+
+            @Override
+            public void walked(long done, long total) {
+                options.progress().at(done, total);
+            }
+        });
+        proof.tail().ifPresent(found::add);
     }
 
     /** Brings the tables up to the journal while that is opened. */
@@ -96,7 +133,7 @@ final class FolderBooks implements Books {
                 } catch (IOException e) {
                     throw new Refused(Fault.defect("store", e, files, folder), e);
                 }
-                tables = Optional.of(OfficeTables.of(folder.resolve(INDEX)));
+                tables = Optional.of(OfficeTables.of(index));
             }
         }
 
@@ -162,7 +199,7 @@ final class FolderBooks implements Books {
     private void drop() throws IOException {
         tables.ifPresent(FolderBooks::closeQuietly);
         tables = Optional.empty();
-        for (Path file : files.list(folder.resolve(INDEX))) {
+        for (Path file : files.list(index)) {
             files.delete(file);
         }
     }
@@ -211,11 +248,6 @@ final class FolderBooks implements Books {
         } catch (IOException e) {
             throw new Refused(Fault.defect("store", e, files, folder), e);
         }
-    }
-
-    /** Whether the tables were made anew. */
-    boolean rebuilt() {
-        return rebuilt;
     }
 
     /** What was not as it was written. */

@@ -32,7 +32,6 @@ import java.io.IOException;
 import java.lang.ref.SoftReference;
 import java.nio.file.Path;
 import java.time.ZonedDateTime;
-import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -50,7 +49,7 @@ import java.util.function.Function;
  */
 public final class OfficeStore implements AutoCloseable {
     private static final String LOCK = "store.lock";
-    private static final String PACKS = "packs";
+    static final String PACKS = "packs";
     private static final String PASSING = "passing";
     private static final String OFFICE = "office.json";
     private static final int JUDGED_AT_ONCE = 500;
@@ -63,13 +62,14 @@ public final class OfficeStore implements AutoCloseable {
     private final Device device;
     private final Books books;
     private final Judge judge;
+    private final Results results;
     private final PackPhotos photos;
     private Minutes minutes = new Minutes();
     private SoftReference<List<ZoneRow>> rows = new SoftReference<>(null);
     private final AtomicBoolean closed = new AtomicBoolean();
 
     private OfficeStore(Path folder, Optional<String> url, OfficeOptions options, Desk desk, Closeable lock,
-                        boolean afresh) throws IOException {
+                        String index, boolean afresh) throws IOException {
         this.folder = folder;
         this.options = options;
         this.desk = desk;
@@ -84,8 +84,9 @@ public final class OfficeStore implements AutoCloseable {
         Effects effects = new Effects(shelf, options.limits(), this::minutes);
         this.books = url.isPresent()
                 ? new ServerBooks(url.get(), options, device.id(), effects, () -> minutes = new Minutes())
-                : FolderBooks.open(folder, options, device.id(), effects, afresh);
+                : FolderBooks.open(folder, index, options, device.id(), effects, afresh);
         this.judge = new Judge(this::version);
+        this.results = new Results(judge, this::minutes);
     }
 
     /**
@@ -95,7 +96,7 @@ public final class OfficeStore implements AutoCloseable {
      *                 store of a tablet, {@code store-…} where the folder can't be used
      */
     public static OfficeStore open(Path folder, OfficeOptions options) {
-        return open(folder, Optional.empty(), options, false);
+        return open(folder, Optional.empty(), options, FolderBooks.INDEX, false);
     }
 
     /**
@@ -110,12 +111,12 @@ public final class OfficeStore implements AutoCloseable {
         if (!OfficeTables.isServer(url)) {
             throw new IllegalArgumentException("no server");
         }
-        return open(own, Optional.of(url), options, false);
+        return open(own, Optional.of(url), options, FolderBooks.INDEX, false);
     }
 
     /** As {@link #open(Path, OfficeOptions)}, with the tables made anew from the journal and the packs. */
     public static OfficeStore rebuild(Path folder, OfficeOptions options) {
-        return open(folder, Optional.empty(), options, true);
+        return open(folder, Optional.empty(), options, FolderBooks.INDEX, true);
     }
 
     /** Whether a folder holds an office store. */
@@ -128,11 +129,17 @@ public final class OfficeStore implements AutoCloseable {
         return OfficeTables.isServer(text);
     }
 
-    private static OfficeStore open(Path folder, Optional<String> url, OfficeOptions options, boolean afresh) {
+    /** An office with its tables made anew in a folder of another name, beside those in use. */
+    static OfficeStore beside(Path folder, String index, OfficeOptions options) {
+        return open(folder, Optional.empty(), options, index, true);
+    }
+
+    private static OfficeStore open(Path folder, Optional<String> url, OfficeOptions options, String index,
+                                    boolean afresh) {
         Path home = folder.toAbsolutePath().normalize();
         Desk desk = new Desk("bedmark-office");
         try {
-            return desk.call(() -> openLocked(home, url, options, desk, afresh));
+            return desk.call(() -> openLocked(home, url, options, desk, index, afresh));
         } catch (RuntimeException e) {
             desk.close();
             throw refused(e);
@@ -140,7 +147,7 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     private static OfficeStore openLocked(Path folder, Optional<String> url, OfficeOptions options, Desk desk,
-                                          boolean afresh) {
+                                          String index, boolean afresh) {
         FileLayer files = options.files();
         try {
             if (files.exists(folder.resolve(DeviceFile.NAME)) && !files.exists(folder.resolve(OFFICE))) {
@@ -150,7 +157,7 @@ public final class OfficeStore implements AutoCloseable {
             Closeable lock = files.lock(folder.resolve(LOCK))
                     .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
             try {
-                return new OfficeStore(folder, url, options, desk, lock, afresh);
+                return new OfficeStore(folder, url, options, desk, lock, index, afresh);
             } catch (IOException | RuntimeException e) {
                 lock.close();
                 throw e;
@@ -320,7 +327,7 @@ public final class OfficeStore implements AutoCloseable {
         });
     }
 
-    private void judgeWaiting(Progress progress) {
+    void judgeWaiting(Progress progress) {
         long total = ask(OfficeTables::countWaiting);
         long done = 0;
         while (done < total && !progress.cancelled()) {
@@ -330,7 +337,7 @@ public final class OfficeStore implements AutoCloseable {
                 tables.alone();
                 List<ZoneId> zones = tables.waiting(JUDGED_AT_ONCE);
                 Map<ZoneId, Optional<Verdict>> verdicts = new LinkedHashMap<>();
-                latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
+                results.latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
                         sides.stream().min(Judge.WORST_FIRST).map(worst -> Judge.verdict(worst.assessment()))));
                 tables.judge(verdicts);
                 rows.clear();
@@ -343,61 +350,25 @@ public final class OfficeStore implements AutoCloseable {
         }
     }
 
-    /** Each zone's latest result, and what clashes with it, by the registers that they were made with. */
-    private Map<ZoneId, List<JudgedZone>> latest(OfficeTables tables, Collection<ZoneId> zones) {
-        Map<ZoneId, MergedZone> merged = new LinkedHashMap<>(Merge.zones(tables.copies(zones),
-                minutes(tables).setAside()));
-        List<Copy> sides = merged.values().stream().flatMap(zone -> zone.latest().stream()).toList();
-        Map<ZoneId, List<JudgedZone>> judged = new LinkedHashMap<>();
-        zones.forEach(zone -> judged.put(zone, new ArrayList<>()));
-        judged(tables, sides, copy -> copy.origin().register()).forEach(one -> judged.get(one.zone()).add(one));
-        return judged;
-    }
-
-    private List<JudgedZone> judged(OfficeTables tables, List<Copy> copies, Function<Copy, String> register) {
-        Map<String, List<Copy>> drives = new HashMap<>();
-        Merge.zones(tables.companions(copies), minutes(tables).setAside()).values().forEach(zone -> zone.results()
-                .forEach(copy -> drives.computeIfAbsent(drive(copy), key -> new ArrayList<>()).add(copy)));
-        Set<String> wanted = new HashSet<>();
-        copies.forEach(copy -> {
-            wanted.add(copy.digest());
-            drives.getOrDefault(drive(copy), List.of()).forEach(other -> wanted.add(other.digest()));
-        });
-        Map<String, Survey> documents = documents(tables, wanted);
-        return copies.stream().flatMap(copy -> judge.judge(copy, register.apply(copy),
-                drives.getOrDefault(drive(copy), List.of()), documents).stream()).toList();
-    }
-
-    private static String drive(Copy copy) {
-        return copy.zone().plant() + '\n' + copy.round() + '\n' + copy.origin().conveyor();
-    }
-
-    private static Map<String, Survey> documents(OfficeTables tables, Collection<String> digests) {
-        Map<String, Survey> documents = new HashMap<>();
-        tables.contents(digests).forEach((digest, text) ->
-                documents.put(digest, new Survey(JsonReader.read(text).root())));
-        return documents;
-    }
-
     /**
      * A zone's latest result by the register that it was made with; the worst, where contents clash.
      *
      * @return nothing where it was never inspected, or can't be judged
      */
     public Optional<JudgedZone> judged(ZoneId zone) {
-        return ask(tables -> latest(tables, List.of(zone)).get(zone).stream().min(Judge.WORST_FIRST));
+        return ask(tables -> results.latest(tables, List.of(zone)).get(zone).stream().min(Judge.WORST_FIRST));
     }
 
     /** The same result by the register that holds today. */
     public Optional<JudgedZone> judgedToday(ZoneId zone) {
-        return ask(tables -> tables.plant(zone.plant()).flatMap(today -> judged(tables,
+        return ask(tables -> tables.plant(zone.plant()).flatMap(today -> results.judged(tables,
                 Merge.zone(zone, tables.copies(List.of(zone)), minutes(tables).setAside()).latest(),
                 copy -> today.register()).stream().min(Judge.WORST_FIRST)));
     }
 
     /** All results of a zone that count, in time order, each by the register that it was made with. */
     public List<JudgedZone> history(ZoneId zone) {
-        return ask(tables -> judged(tables, Merge.zone(zone, tables.copies(List.of(zone)),
+        return ask(tables -> results.judged(tables, Merge.zone(zone, tables.copies(List.of(zone)),
                 minutes(tables).setAside()).results(), copy -> copy.origin().register()));
     }
 
@@ -412,7 +383,7 @@ public final class OfficeStore implements AutoCloseable {
         List<JudgedZone> counted = history(zone);
         Set<String> digests = new HashSet<>();
         counted.forEach(one -> digests.add(one.copy().digest()));
-        List<JudgedZone> replaced = ask(tables -> judged(tables, tables.copies(List.of(zone)).stream()
+        List<JudgedZone> replaced = ask(tables -> results.judged(tables, tables.copies(List.of(zone)).stream()
                 .filter(copy -> copy.result() && !digests.contains(copy.digest())).toList(),
                 copy -> copy.origin().register()));
         return ZoneTrend.of(zone, counted, replaced);
@@ -422,14 +393,14 @@ public final class OfficeStore implements AutoCloseable {
     List<FlatRow> rows(List<String> digests) {
         return ask(tables -> {
             Map<String, Copy> copies = tables.copiesOf(digests);
-            Map<String, Survey> documents = documents(tables, digests);
+            Map<String, Survey> documents = Results.documents(tables, digests);
             List<Copy> ordered = digests.stream().map(copies::get).toList();
             Set<String> counting = new HashSet<>();
             Merge.zones(tables.copies(ordered.stream().map(Copy::zone).distinct().toList()),
                     minutes(tables).setAside()).values().forEach(zone -> zone.visits().forEach(copy ->
                     counting.add(copy.digest())));
             Map<String, JudgedZone> judged = new HashMap<>();
-            judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
+            results.judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
                     .forEach(one -> judged.put(one.copy().digest(), one));
             return ordered.stream().map(copy -> new FlatRow(copy, counting.contains(copy.digest()),
                     documents.get(copy.digest()), judge.register(copy.origin().register()),
@@ -444,7 +415,7 @@ public final class OfficeStore implements AutoCloseable {
 
     /** A zone's surveys by their digests, with all sides of every clash. */
     public Map<String, Survey> surveys(Collection<String> digests) {
-        return ask(tables -> documents(tables, digests));
+        return ask(tables -> Results.documents(tables, digests));
     }
 
     /** The zone with that id, or with that tag where there is one alone. */

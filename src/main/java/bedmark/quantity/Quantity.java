@@ -23,7 +23,8 @@ public record Quantity(BigDecimal value, Unit unit, Optional<String> entered,
 
     /** Orders quantities of one dimension by size, exactly, whatever their units. */
     public static final Comparator<Quantity> BY_SIZE =
-            (one, other) -> one.value.compareTo(one.unit.convert(other.value, other.unit));
+            (one, other) -> one.value.compareTo(one.unit == other.unit ? other.value
+                    : one.unit.convert(other.value, other.unit));
 
     public Quantity {
         Objects.requireNonNull(value);

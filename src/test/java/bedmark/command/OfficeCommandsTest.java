@@ -157,4 +157,23 @@ class OfficeCommandsTest {
         }
         assertEquals(2, Terminal.run("office").code());
     }
+
+    @Test
+    void anOfficeIsProvedAndMadeAnewAndNotMadeByLookingAtIt() throws IOException {
+        String absent = folder.resolve("nowhere").toString();
+        assertEquals(3, Terminal.run("office", "check", absent).code());
+        assertEquals(3, Terminal.run("office", "rebuild", absent).code());
+        assertTrue(Files.notExists(Path.of(absent)));
+        assertEquals(0, received().code());
+        String office = folder.resolve("office").toString();
+        Result sound = Terminal.run("office", "check", office);
+        assertEquals(0, sound.code(), sound::err);
+        assertEquals(0, Terminal.run("office", "rebuild", office).code());
+        try (var files = Files.list(folder.resolve("office/packs"))) {
+            Files.delete(files.findFirst().orElseThrow());
+        }
+        Result damaged = Terminal.run("office", "check", office);
+        assertEquals(3, damaged.code());
+        assertTrue(damaged.err().contains("gone"), damaged::err);
+    }
 }

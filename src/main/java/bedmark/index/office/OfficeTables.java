@@ -1,5 +1,6 @@
 package bedmark.index.office;
 
+import bedmark.journal.Digest;
 import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.ZoneId;
 import java.nio.file.Path;
@@ -15,6 +16,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.TreeMap;
 import java.util.TreeSet;
 import java.util.UUID;
 import java.util.function.Supplier;
@@ -38,6 +40,9 @@ public final class OfficeTables implements AutoCloseable {
     private static final String JUDGED = "update zone set judged = true, level = ?, incomplete = ?, drive_share = ?, "
             + "skirt_power = ?, saving_wh = ?, saving_cost = ?, saving_co2 = ?, remedy = ?, energy_wh = ?, cost = ?, "
             + "co2 = ?, energy_kind = ?, currency = ?, findings = ? where zone = ?";
+
+    private static final Map<String, String> TABLES = Map.of("deed", "seq", "pack", "sha256", "register", "digest",
+            "plant", "id", "survey", "digest", "zone", "zone");
 
     private final Link link;
     private final boolean server;
@@ -161,8 +166,8 @@ public final class OfficeTables implements AutoCloseable {
     }
 
     public Optional<byte[]> register(String digest) {
-        return link.rows("select content from register where digest = ?", row -> row.getBytes(1), digest).stream()
-                .findFirst();
+        return link.rows("select content from register where digest = ?", row -> sound(digest, row.getBytes(1)), digest)
+                .stream().findFirst();
     }
 
     /** The digests of all versions of registers. */
@@ -235,7 +240,7 @@ public final class OfficeTables implements AutoCloseable {
     public Map<String, byte[]> contents(Collection<String> digests) {
         Map<String, byte[]> contents = new HashMap<>();
         link.rows("select digest, content from survey where digest = any(?)", row ->
-                contents.put(row.getString(1), row.getBytes(2)), link.texts(digests));
+                contents.put(row.getString(1), sound(row.getString(1), row.getBytes(2))), link.texts(digests));
         return contents;
     }
 
@@ -355,6 +360,22 @@ public final class OfficeTables implements AutoCloseable {
     public Optional<ZoneRow> zone(ZoneId zone) {
         return link.rows("select " + ZoneRow.COLUMNS + " from zone where zone = ?", ZoneRow::read, zone.key()).stream()
                 .findFirst();
+    }
+
+    /** What is kept under its digest is what was taken in, or the tables are broken. */
+    private static byte[] sound(String digest, byte[] content) {
+        if (!Digest.of(content).hex().equals(digest)) {
+            throw new OfficeBroken("a content is not that of its digest " + digest);
+        }
+        return content;
+    }
+
+    /** Every row of every table, by table and key, in a digest of its own: two offices are told apart by them. */
+    public Map<RowId, String> rowDigests() {
+        Map<RowId, String> digests = new TreeMap<>();
+        TABLES.forEach((table, key) -> link.rows("select " + key + ", t.* from " + table + " t", row ->
+                digests.put(new RowId(table, row.getString(1)), RowId.digest(row))));
+        return digests;
     }
 
     /** How many contents of surveys there are. */

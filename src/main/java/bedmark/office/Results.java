@@ -1,0 +1,67 @@
+package bedmark.office;
+
+import bedmark.index.office.OfficeTables;
+import bedmark.json.JsonReader;
+import bedmark.survey.Survey;
+import bedmark.survey.merge.Copy;
+import bedmark.survey.merge.Merge;
+import bedmark.survey.merge.MergedZone;
+import bedmark.survey.merge.ZoneId;
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.function.Function;
+
+/** Surveys of the tables, judged beside what loaded the same drives. */
+final class Results {
+    private final Judge judge;
+    private final Function<OfficeTables, Minutes> minutes;
+
+    Results(Judge judge, Function<OfficeTables, Minutes> minutes) {
+        this.judge = judge;
+        this.minutes = minutes;
+    }
+
+    /** Each zone's latest result, and what clashes with it, by the registers that they were made with. */
+    Map<ZoneId, List<JudgedZone>> latest(OfficeTables tables, Collection<ZoneId> zones) {
+        Map<ZoneId, MergedZone> merged = new LinkedHashMap<>(Merge.zones(tables.copies(zones),
+                minutes.apply(tables).setAside()));
+        List<Copy> sides = merged.values().stream().flatMap(zone -> zone.latest().stream()).toList();
+        Map<ZoneId, List<JudgedZone>> judged = new LinkedHashMap<>();
+        zones.forEach(zone -> judged.put(zone, new ArrayList<>()));
+        judged(tables, sides, copy -> copy.origin().register()).forEach(one -> judged.get(one.zone()).add(one));
+        return judged;
+    }
+
+    /** Contents, judged by the register that is named for each; those that can't be are left out. */
+    List<JudgedZone> judged(OfficeTables tables, List<Copy> copies, Function<Copy, String> register) {
+        Map<String, List<Copy>> drives = new HashMap<>();
+        Merge.zones(tables.companions(copies), minutes.apply(tables).setAside()).values().forEach(zone -> zone.results()
+                .forEach(copy -> drives.computeIfAbsent(drive(copy), key -> new ArrayList<>()).add(copy)));
+        Set<String> wanted = new HashSet<>();
+        copies.forEach(copy -> {
+            wanted.add(copy.digest());
+            drives.getOrDefault(drive(copy), List.of()).forEach(other -> wanted.add(other.digest()));
+        });
+        Map<String, Survey> documents = documents(tables, wanted);
+        return copies.stream().flatMap(copy -> judge.judge(copy, register.apply(copy),
+                drives.getOrDefault(drive(copy), List.of()), documents).stream()).toList();
+    }
+
+    private static String drive(Copy copy) {
+        return copy.zone().plant() + '\n' + copy.round() + '\n' + copy.origin().conveyor();
+    }
+
+    /** The surveys with those digests. */
+    static Map<String, Survey> documents(OfficeTables tables, Collection<String> digests) {
+        Map<String, Survey> documents = new HashMap<>();
+        tables.contents(digests).forEach((digest, text) ->
+                documents.put(digest, new Survey(JsonReader.read(text).root())));
+        return documents;
+    }
+}

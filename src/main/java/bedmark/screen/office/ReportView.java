@@ -64,6 +64,8 @@ final class ReportView extends VBox {
             listening.to(chosen, now -> button.setSelected(code.apply(now).equals(code.apply(one))));
             buttons.getChildren().add(button);
         }
-        return new VBox(label, buttons);
+        VBox choice = new VBox(label, buttons);
+        choice.getStyleClass().add("choice");
+        return choice;
     }
 }

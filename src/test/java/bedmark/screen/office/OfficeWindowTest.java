@@ -13,7 +13,6 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Locale;
 import java.util.stream.Stream;
 import javafx.scene.Node;
 import javafx.scene.control.ListView;
@@ -194,36 +193,5 @@ class OfficeWindowTest {
             });
             window.until(() -> window.desk().store().packs().size() == 2);
         }
-    }
-
-    @Test
-    void everyScreenIsDrawnInBothShapesLightsAndLanguages() throws Exception {
-        for (double[] size : List.of(new double[] {1280, 800}, new double[] {800, 1280})) {
-            String shape = size[0] > size[1] ? "landscape" : "portrait";
-            try (OfficeWindow window = window(size[0], size[1])) {
-                receiveAll(window);
-                for (String look : List.of("day-en", "night-es")) {
-                    Glass.on(() -> {
-                        window.desk().preferencesProperty().set(window.desk().preferences()
-                                .withNight(look.startsWith("night"))
-                                .withLocale(Locale.forLanguageTag(look.substring(look.length() - 2))));
-                        return null;
-                    });
-                    for (OfficeShell.Room room : OfficeShell.Room.values()) {
-                        Glass.on(() -> {
-                            window.shell().open(room);
-                            return null;
-                        });
-                        window.picture("office-" + room.name().toLowerCase(Locale.ROOT) + "-" + shape + "-" + look);
-                    }
-                    Glass.on(() -> {
-                        window.shell().zone(window.desk().store().rank().get(0).zone());
-                        return null;
-                    });
-                    window.picture("office-zone-" + shape + "-" + look);
-                }
-            }
-        }
-        assertTrue(Files.exists(Path.of("target/pictures/office-zone-portrait-night-es.png")));
     }
 }

@@ -1,31 +1,17 @@
 package bedmark.command;
 
-import bedmark.document.Defect;
-import bedmark.document.Refused;
 import bedmark.office.OfficeStore;
 import bedmark.office.RankQuery;
 import bedmark.quantity.UnitSystem;
-import bedmark.report.PdfReport;
 import bedmark.report.ReportContent;
+import bedmark.report.ReportFile;
 import bedmark.report.ReportOptions;
-import bedmark.report.ReportTables;
 import bedmark.report.paper.PaperSize;
-import bedmark.report.table.CsvTable;
-import bedmark.report.table.WorkbookFile;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
-import java.io.BufferedOutputStream;
-import java.io.IOException;
-import java.io.OutputStream;
-import java.io.OutputStreamWriter;
-import java.io.Writer;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.time.Duration;
 import java.time.OffsetDateTime;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -73,18 +59,14 @@ final class OfficeReportCommand implements Callable<Integer> {
             description = "Size of the pages (default: ${DEFAULT-VALUE}).")
     private String paper;
 
-    /** The kinds of file. */
-    private enum Kind {
-        PDF, XLSX, CSV
-    }
-
     OfficeReportCommand(Surroundings surroundings) {
         this.surroundings = surroundings;
     }
 
     @Override
     public Integer call() {
-        Kind kind = kind();
+        ReportFile.Kind kind = ReportFile.Kind.of(out).orElseThrow(() ->
+                bad("--out is a file .pdf, .xlsx or .csv, not '" + out + "'"));
         Words words = language.map(this::words).orElse(surroundings.words());
         UnitSystem system = UnitSystem.ofCode(units).orElseThrow(() -> bad("--units is metric or us, not '" + units + "'"));
         PaperSize size = PaperSize.ofCode(paper).orElseThrow(() -> bad("--paper is a4 or letter, not '" + paper + "'"));
@@ -99,21 +81,11 @@ final class OfficeReportCommand implements Callable<Integer> {
             ReportOptions options = new ReportOptions(new Wording(words, system), size,
                     (zone, sha256) -> store.photo(zone, sha256), "Bedmark " + ProgramVersion.number(),
                     progress::at);
-            whole(target -> write(kind, content, options, target));
+            ReportFile.write(out, kind, content, options);
             progress.done();
             surroundings.out().println(surroundings.words().text("report.written", out, content.zones().size()));
         }
         return ExitCode.FINE;
-    }
-
-    private Kind kind() {
-        String name = String.valueOf(out.getFileName()).toLowerCase(Locale.ROOT);
-        for (Kind kind : Kind.values()) {
-            if (name.endsWith("." + kind.name().toLowerCase(Locale.ROOT))) {
-                return kind;
-            }
-        }
-        throw bad("--out is a file .pdf, .xlsx or .csv, not '" + out + "'");
     }
 
     private Words words(String code) {
@@ -123,41 +95,5 @@ final class OfficeReportCommand implements Callable<Integer> {
 
     private ParameterException bad(String sentence) {
         return new ParameterException(spec.commandLine(), sentence);
-    }
-
-    private static void write(Kind kind, ReportContent content, ReportOptions options, OutputStream target)
-            throws IOException {
-        switch (kind) {
-            case PDF -> new PdfReport(content, options).write(target);
-            case XLSX -> {
-                ReportTables tables = new ReportTables(content, options);
-                WorkbookFile.write(tables.all(), tables.dictionary(), "1.0", target);
-            }
-            case CSV -> {
-                Writer writer = new OutputStreamWriter(target, StandardCharsets.UTF_8);
-                CsvTable.write(new ReportTables(content, options).zones(), writer);
-                writer.flush();
-            }
-        }
-    }
-
-    /** Something that is written to a stream. */
-    private interface Writing {
-        void to(OutputStream target) throws IOException;
-    }
-
-    /** The file is there whole or not at all; one that was there before stays until then. */
-    private void whole(Writing writing) {
-        Path file = out.toAbsolutePath();
-        Path part = file.resolveSibling(file.getFileName() + ".part");
-        try {
-            try (OutputStream target = new BufferedOutputStream(Files.newOutputStream(part))) {
-                writing.to(target);
-            }
-            Files.move(part, file, StandardCopyOption.REPLACE_EXISTING);
-        } catch (IOException e) {
-            part.toFile().delete();
-            throw new Refused(Defect.in(out.toString(), "report-unwritable"), e);
-        }
     }
 }

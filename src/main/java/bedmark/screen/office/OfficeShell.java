@@ -33,7 +33,7 @@ public final class OfficeShell {
 
     /** The rooms. */
     public enum Room {
-        WORST("worst"), RECEIVE("receive"), ENERGY("energy"), REGISTER("register");
+        WORST("worst"), RECEIVE("receive"), ENERGY("energy"), REGISTER("register"), REPORT("report");
 
         private final String code;
 
@@ -86,6 +86,7 @@ public final class OfficeShell {
             case RECEIVE -> new ReceiveView(desk, receive, begin());
             case ENERGY -> new EnergyView(desk, new EnergyModel(desk), begin());
             case REGISTER -> new RegisterView(desk, new RegisterModel(desk), begin());
+            case REPORT -> new ReportView(desk, new ReportModel(desk), begin());
         });
     }
 

@@ -9,14 +9,22 @@ import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.office.Offices;
 import java.io.IOException;
+import java.io.OutputStream;
+import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.UUID;
 import java.util.stream.Stream;
+import org.dhatim.fastexcel.Workbook;
+import org.dhatim.fastexcel.Worksheet;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
+import org.junit.jupiter.api.io.TempDir;
 
 /** Registers from tables: forty kinds of bad rows, each named, and none of them leaves anything behind. */
 class RegisterImportTest {
@@ -137,6 +145,40 @@ class RegisterImportTest {
             assertEquals(List.of(bad.code() + " " + bad.where()), draft.defects().stream()
                     .map(defect -> defect.code() + " " + defect.where()).toList());
         }));
+    }
+
+    /** The same rows out of a workbook: what looks like a number is one there, everything else a text. */
+    @TestFactory
+    Stream<DynamicTest> everyBadRowOfAWorkbookIsNamed(@TempDir Path folder) {
+        // A workbook is XML, which can't hold a bell.
+        List<Bad> held = bad().stream().filter(bad -> !String.join("", bad.lines()).contains("\u0007")).toList();
+        assertTrue(held.size() >= 40);
+        return held.stream().map(bad -> DynamicTest.dynamicTest(bad.code() + " " + bad.where(), () -> {
+            String name = UUID.randomUUID() + ".xlsx";
+            Path file = folder.resolve(name);
+            try (OutputStream out = Files.newOutputStream(file); Workbook workbook = new Workbook(out, "bedmark",
+                    "1.0")) {
+                Worksheet sheet = workbook.newWorksheet(bad.list());
+                for (int row = 0; row < bad.lines().length; row++) {
+                    String[] cells = bad.lines()[row].split(",", -1);
+                    for (int column = 0; column < cells.length; column++) {
+                        put(sheet, row, column, cells[column]);
+                    }
+                }
+            }
+            Draft draft = RegisterImport.draft(HEAD, Tables.read(file), Map.of());
+            String where = bad.where().replace(bad.list() + ".csv", name + " / " + bad.list());
+            assertEquals(List.of(bad.code() + " " + where), draft.defects().stream()
+                    .map(defect -> defect.code() + " " + defect.where()).toList());
+        }));
+    }
+
+    private static void put(Worksheet sheet, int row, int column, String cell) {
+        if (cell.matches("-?[0-9]+([.][0-9]+)?")) {
+            sheet.value(row, column, new BigDecimal(cell));
+        } else if (!cell.isEmpty()) {
+            sheet.value(row, column, cell);
+        }
     }
 
     @Test

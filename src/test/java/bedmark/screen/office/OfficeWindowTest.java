@@ -9,11 +9,12 @@ import bedmark.office.Offices;
 import bedmark.office.RankedZone;
 import bedmark.screen.Glass;
 import bedmark.survey.Bundle;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Locale;
 import java.util.stream.Stream;
+import javafx.scene.Node;
 import javafx.scene.control.ListView;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -155,33 +156,42 @@ class OfficeWindowTest {
     }
 
     @Test
-    void everyScreenIsDrawnInBothShapesLightsAndLanguages() throws Exception {
-        for (double[] size : List.of(new double[] {1280, 800}, new double[] {800, 1280})) {
-            String shape = size[0] > size[1] ? "landscape" : "portrait";
-            try (OfficeWindow window = window(size[0], size[1])) {
-                receiveAll(window);
-                for (String look : List.of("day-en", "night-es")) {
-                    Glass.on(() -> {
-                        window.desk().preferencesProperty().set(window.desk().preferences()
-                                .withNight(look.startsWith("night"))
-                                .withLocale(Locale.forLanguageTag(look.substring(look.length() - 2))));
-                        return null;
-                    });
-                    for (OfficeShell.Room room : OfficeShell.Room.values()) {
-                        Glass.on(() -> {
-                            window.shell().open(room);
-                            return null;
-                        });
-                        window.picture("office-" + room.name().toLowerCase(Locale.ROOT) + "-" + shape + "-" + look);
-                    }
-                    Glass.on(() -> {
-                        window.shell().zone(window.desk().store().rank().get(0).zone());
-                        return null;
-                    });
-                    window.picture("office-zone-" + shape + "-" + look);
-                }
-            }
+    void theReportIsWrittenAsChosen() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            window.click("room-report");
+            window.chooses(Files.createDirectories(folder.resolve("out")));
+            window.click("report-kind-csv");
+            window.click("report-language-es");
+            assertTrue(window.node("report-paper-letter").isDisabled(), "paper is for pages");
+            window.click("report-write");
+            window.until(() -> window.words().contains("-es.csv"));
+            window.click("report-kind-pdf");
+            window.click("report-paper-letter");
+            window.click("report-write");
+            window.until(() -> window.words().contains("-es.pdf"));
         }
-        assertTrue(Files.exists(Path.of("target/pictures/office-zone-portrait-night-es.png")));
+        try (Stream<Path> files = Files.list(folder.resolve("out"))) {
+            List<Path> written = files.sorted().toList();
+            assertEquals(2, written.size());
+            assertTrue(Files.readString(written.get(0)).contains("TP-01"));
+            assertTrue(new String(Files.readAllBytes(written.get(1)), StandardCharsets.ISO_8859_1)
+                    .startsWith("%PDF-"));
+        }
+    }
+
+    @Test
+    void packsDroppedOntoTheWindowAreReceived() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            window.desk().store().trust(Offices.fingerprint(folder.resolve("tablet")), "", "Ida Marsh");
+            window.click("room-receive");
+            Node place = window.node("drop-place");
+            List<Path> dropped = List.of(packs.resolve("round-2025-09.zip"), packs.resolve("round-2026-03.zip"));
+            Glass.on(() -> {
+                DroppedFiles.onto(place, dropped);
+                return null;
+            });
+            window.until(() -> window.desk().store().packs().size() == 2);
+        }
     }
 }

@@ -68,6 +68,9 @@ final class FormPane extends VBox {
             getChildren().addAll(header, scroll, caution);
         }
         sceneProperty().addListener((property, before, now) -> fill());
+        // Rows that came in above the active one, or grew, have moved it; it is looked for once they have their places.
+        list.heightProperty().addListener((property, before, now) ->
+                Platform.runLater(() -> inHand.ifPresent(this::reveal)));
         listening.to(model.rowsProperty(), this::layOut);
         listening.onChange(model.keptProperty(), kept -> rows.forEach(RowPlace::update));
         listening.onChange(model.typedProperty(), typed -> typed());

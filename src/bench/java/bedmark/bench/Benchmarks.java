@@ -18,7 +18,9 @@ public final class Benchmarks {
                     new StartSuite(),
                     new ExportSuite(),
                     new WindowSuite(),
-                    new OfficeSuite());
+                    new OfficeSuite(),
+                    new StoreGrowthSuite(),
+                    new PlantGrowthSuite());
 
     private Benchmarks() {
     }

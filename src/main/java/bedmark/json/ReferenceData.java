@@ -169,4 +169,14 @@ public final class ReferenceData {
     public Branch filled(Branch plant) {
         return new ReferenceMaterials(files.get(ReferenceFile.MATERIALS)).filled(plant);
     }
+
+    /**
+     * The materials whose density and surcharge angle the table knows, each as a plant's material that names its row:
+     * what a plant begins with that has no register yet.
+     *
+     * @param language of the names
+     */
+    public List<Branch> materials(String language) {
+        return new ReferenceMaterials(files.get(ReferenceFile.MATERIALS)).complete(language);
+    }
 }

@@ -48,6 +48,16 @@ final class ReferenceMaterials {
         return plant.with("materials", new Node.Series(materials));
     }
 
+    /** Every row with a density and a surcharge angle, as a material that names it and is filled in from it. */
+    List<Branch> complete(String language) {
+        return file.branches("properties").stream().map(row -> {
+            String id = row.text("id").orElseThrow();
+            String name = row.branch("name").flatMap(names -> names.text(language).or(() -> names.text("en"))).orElse(id);
+            return filled(Branch.EMPTY.with("id", id).with("name", name).with("reference", id), id,
+                    Pointer.of("reference"));
+        }).filter(material -> material.has("bulkDensity") && material.has("surchargeAngle")).toList();
+    }
+
     private Branch filled(Branch material, String id, Pointer place) {
         Optional<Branch> factor = row("factors", id);
         Optional<Branch> properties = row("properties", id);

@@ -15,6 +15,7 @@ import bedmark.wording.Wording;
 import bedmark.words.Words;
 import java.nio.file.Path;
 import java.time.Clock;
+import java.time.Duration;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
@@ -27,6 +28,8 @@ import javafx.stage.Stage;
 public final class BedmarkApp extends Application {
     private static final double WIDTH = 1280;
     private static final double HEIGHT = 800;
+    /** By then a person has begun to walk, and the start is not held up. */
+    private static final Duration PROOF_DELAY = Duration.ofSeconds(20);
 
     /** What the launcher hands over; the toolkit makes the application itself and takes no arguments but texts. */
     private static Optional<Launch> launch = Optional.empty();
@@ -125,6 +128,7 @@ public final class BedmarkApp extends Application {
     private void work(Stage stage, Launch given, Store store, Optional<Site> site) {
         Workplace here = new Workplace(store, site, given.clock(), Platform::runLater, new StageChoice(stage),
                 given.samples());
+        here.proveAfter(PROOF_DELAY);
         Shell opened = new Shell(here, WIDTH, HEIGHT);
         workplace = Optional.of(here);
         shell = Optional.of(opened);

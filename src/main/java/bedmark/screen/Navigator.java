@@ -9,6 +9,9 @@ public interface Navigator {
     /** To the start of a walk. */
     void toStart();
 
+    /** To the questions about a new plant, and from there back to the start. */
+    void toNewPlant();
+
     /** To the round that is walked. */
     void toRound(RoundModel round);
 

@@ -11,6 +11,8 @@ import bedmark.screen.round.RoundRow;
 import bedmark.screen.round.RoundView;
 import bedmark.screen.settings.SettingsModel;
 import bedmark.screen.settings.SettingsView;
+import bedmark.screen.start.NewPlantModel;
+import bedmark.screen.start.NewPlantView;
 import bedmark.screen.start.StartModel;
 import bedmark.screen.start.StartView;
 import bedmark.screen.store.StoreModel;
@@ -215,6 +217,11 @@ public final class Shell implements Navigator {
         walked = Optional.empty();
         StartModel model = new StartModel(workplace);
         show(() -> new StartView(workplace, model, this));
+    }
+
+    @Override
+    public void toNewPlant() {
+        NewPlantModel.of(workplace).ifPresent(model -> show(() -> new NewPlantView(workplace, model, this::toStart)));
     }
 
     @Override

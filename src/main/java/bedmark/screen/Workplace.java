@@ -8,6 +8,7 @@ import bedmark.wording.Wording;
 import bedmark.words.Words;
 import java.nio.file.Path;
 import java.time.Clock;
+import java.time.Duration;
 import java.util.Optional;
 import java.util.concurrent.Executor;
 import java.util.concurrent.ExecutorService;
@@ -29,6 +30,7 @@ public final class Workplace implements AutoCloseable {
     private final Optional<Path> samples;
     private final Scribe scribe;
     private final PreferencesFile preferencesFile;
+    private Optional<BackgroundProof> proof = Optional.empty();
     private final ExecutorService longWork = Executors.newSingleThreadExecutor(run -> {
         Thread thread = new Thread(run, "long-work");
         thread.setDaemon(true);
@@ -147,6 +149,12 @@ public final class Workplace implements AutoCloseable {
         scribe.report(Defect.in("", FAILED, failure.getClass().getSimpleName()));
     }
 
+    /** Proves the store behind everything else, and says in the head of the screen where something is wrong. */
+    void proveAfter(Duration delay) {
+        proof = Optional.of(new BackgroundProof(store, delay, check -> screen.execute(() -> scribe.report(
+                Defect.in("", "proof-unsound", Integer.toString(check.defects().size()))))));
+    }
+
     /** Runs work that takes time beside the screen, one after the other. */
     public Executor longWork() {
         return longWork;
@@ -160,6 +168,7 @@ public final class Workplace implements AutoCloseable {
     /** Ends the long work, saves what waits, and closes the store. */
     @Override
     public void close() {
+        proof.ifPresent(BackgroundProof::close);
         longWork.shutdownNow();
         scribe.close();
         store.close();

@@ -176,6 +176,32 @@ class ScreenScanTest {
         app.settle();
     }
 
+    /** A tablet that is turned: what was wide becomes narrow without being made anew. */
+    @Test
+    void turnedRoundIsNarrowAgain() throws Exception {
+        try (TabletApp opened = new TabletApp(temp.resolve("store"), Optional.of(Path.of("sample-surveys")), temp,
+                Clock.systemUTC(), 1280, 800)) {
+            app = opened;
+            app.click("load-demo");
+            app.until(() -> app.has("person"));
+            app.click("person");
+            app.type("A. Vale");
+            app.click("caution-read");
+            app.click("start-walk");
+            app.until(() -> app.has("search"));
+            Glass.on(() -> {
+                Scene scene = app.shell().scene();
+                Density density = Shell.density(app.workplace().preferences());
+                assertEquals(List.of(), ScreenScan.of(scene.getRoot(), density, 1280, 800));
+                app.shell().screen().turned(true);
+                assertEquals(List.of(), ScreenScan.of(scene.getRoot(), density, 800, 1280));
+                app.shell().screen().turned(false);
+                assertEquals(List.of(), ScreenScan.of(scene.getRoot(), density, 1280, 800));
+                return null;
+            });
+        }
+    }
+
     private void prefer(Look look) {
         app.workplace().preferencesProperty().set(app.workplace().preferences().withLocale(look.language())
                 .withNight(look.night()).withGloves(look.gloves()).withDpi(look.dpi()).withText(look.text()));

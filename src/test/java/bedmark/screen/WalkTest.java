@@ -7,6 +7,7 @@ import bedmark.command.Terminal;
 import bedmark.index.SurveyLine;
 import bedmark.index.SurveyQuery;
 import bedmark.quantity.Quantity;
+import bedmark.screen.part.FieldBox;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.QueueState;
 import java.nio.file.Files;
@@ -150,7 +151,19 @@ class WalkTest {
         for (char sign : number.toCharArray()) {
             app.click(sign == '.' ? "pad-decimal" : "pad-digit-" + sign);
         }
+        String cell = active();
         app.click("pad-next");
+        if (!cell.isEmpty() && active().equals(cell)) {
+            // It was questioned once; the second press says that it is meant.
+            app.click("pad-next");
+        }
+    }
+
+    /** The id of the box that the pad types into. */
+    private String active() throws Exception {
+        return Glass.on(() -> app.shell().scene().getRoot().lookupAll(".field-box").stream()
+                .map(FieldBox.class::cast).filter(box -> box.activeProperty().get()).map(FieldBox::getId).findFirst()
+                .orElse(""));
     }
 
     private void choice(int place) throws Exception {
@@ -214,7 +227,11 @@ class WalkTest {
 
     private void enter(String number) throws Exception {
         app.type(number);
+        String cell = active();
         app.press(KeyCode.ENTER);
+        if (active().equals(cell)) {
+            app.press(KeyCode.ENTER);
+        }
     }
 
     /** Goes to a button by Tab, sees its ring, and presses it by the space bar. */

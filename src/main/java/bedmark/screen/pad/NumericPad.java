@@ -18,6 +18,7 @@ import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.RowConstraints;
 import javafx.scene.layout.StackPane;
+import javafx.scene.text.TextAlignment;
 
 /**
  * The keys of the pad, as wide and high as there is room: five across and four down, or seven across and three down
@@ -103,6 +104,11 @@ public final class NumericPad extends StackPane {
         if (key == PadKey.BACKSPACE || key == PadKey.HISTORY) {
             button.setGraphic(new IconView(key == PadKey.HISTORY ? Icon.HISTORY : Icon.BACKSPACE));
             button.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
+        }
+        if (key == PadKey.UNIT) {
+            // "short ton/h" takes two lines.
+            button.setWrapText(true);
+            button.setTextAlignment(TextAlignment.CENTER);
         }
         if (key == PadKey.NEXT) {
             button.getStyleClass().add("primary");

@@ -8,7 +8,8 @@ import javafx.scene.layout.Region;
 
 /**
  * The round as a strip of ticks in walking order: one for each transfer point, what was found by shape and colour, the
- * one in hand framed. As many as a round has fit; the words for the whole strip come in as its accessible text.
+ * one in hand framed. Where the room is too narrow for all to be told apart, those around the one in hand are shown;
+ * the words for the whole strip come in as its accessible text.
  */
 public final class RoundTicks extends Region {
     private static final PseudoClass CURRENT = PseudoClass.getPseudoClass("current");
@@ -16,6 +17,10 @@ public final class RoundTicks extends Region {
     private static final double WIDTH_TO_PITCH = 13.0 / 18;
     private static final double PLAIN_HEIGHT = 0.72;
     private static final double SKIPPED_HEIGHT = 0.14;
+    /** Narrower than this (px) ticks run into one another. */
+    private static final double LEAST_PITCH = 5;
+    /** How wide (px) each is then, where only some are shown. */
+    private static final double SOME_PITCH = 9;
 
     /** What a tick says about its transfer point. */
     public enum Tick {
@@ -80,12 +85,17 @@ public final class RoundTicks extends Region {
         double left = snappedLeftInset();
         double room = getWidth() - left - snappedRightInset();
         double tall = getHeight() - snappedTopInset() - snappedBottomInset();
-        double pitch = Math.min(PITCH_TO_HEIGHT * tall, ticks.isEmpty() ? room : room / ticks.size());
-        double start = left + (room - pitch * ticks.size()) / 2;
+        int fitting = room >= ticks.size() * LEAST_PITCH ? Math.max(1, ticks.size())
+                : (int) Math.max(1, Math.floor(room / SOME_PITCH));
+        int first = Math.max(0, Math.min(current.orElse(0) - fitting / 2, ticks.size() - fitting));
+        double pitch = Math.min(PITCH_TO_HEIGHT * tall, room / fitting);
+        double start = left + (room - pitch * fitting) / 2;
         for (int i = 0; i < ticks.size(); i++) {
             double height = snapSizeY(tall * share(i));
             double width = Math.max(3, snapSizeX(pitch * WIDTH_TO_PITCH));
-            getChildren().get(i).resizeRelocate(snapPositionX(start + i * pitch + (pitch - width) / 2),
+            int place = i - first;
+            getChildren().get(i).setVisible(place >= 0 && place < fitting);
+            getChildren().get(i).resizeRelocate(snapPositionX(start + place * pitch + (pitch - width) / 2),
                     snapPositionY(snappedTopInset() + (tall - height) / 2), width, height);
         }
     }

@@ -125,7 +125,8 @@ public final class RoundView extends SidedScreen {
             list.getChildren().add(stop(row));
         }
         if (list.getChildren().isEmpty()) {
-            Label nothing = new Label(wording.text("screen.round.nothing-found"));
+            Label nothing = new Label(wording.text(model.rowsProperty().get().isEmpty() ? "first.no-stops"
+                    : "screen.round.nothing-found"));
             nothing.setWrapText(true);
             list.getChildren().add(nothing);
         }
@@ -201,6 +202,9 @@ public final class RoundView extends SidedScreen {
                 + (row.notes() > 0 ? ", " + wording.text("walk.notes", row.notes()) : ""));
         open.getStyleClass().add("secondary-target");
         open.setMaxWidth(Double.MAX_VALUE);
+        // Its content is as wide as the button: a width that it asked for itself would never become less again.
+        open.setMinWidth(0);
+        open.setPrefWidth(100);
         content.prefWidthProperty().bind(open.widthProperty().subtract(36));
         HBox.setHgrow(open, Priority.ALWAYS);
         HBox line = new HBox(open);

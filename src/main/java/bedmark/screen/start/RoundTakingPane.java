@@ -6,7 +6,9 @@ import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
+import java.nio.file.Path;
 import java.util.Optional;
+import javafx.scene.control.Label;
 import javafx.scene.layout.VBox;
 
 /** The button that takes the office's round file in, and below it what came of that. */
@@ -21,8 +23,8 @@ final class RoundTakingPane extends VBox {
         getStyleClass().add("question");
         outcome.getStyleClass().add("question");
         ActionButton take = new ActionButton(Weight.PLAIN, wording.text("office.take.button"), () ->
-                workplace.folderChoice().choose(wording.text("office.take.button"), Optional.empty())
-                        .ifPresent(taking::take));
+                workplace.folderChoice().choose(wording.text("office.take.button"), workplace.preferences()
+                        .exportFolder().map(Path::of)).ifPresent(taking::take));
         take.setId("take-round");
         take.setMaxWidth(Double.MAX_VALUE);
         getChildren().addAll(take, outcome);
@@ -41,11 +43,16 @@ final class RoundTakingPane extends VBox {
                 outcome.getChildren().addAll(Texts.wrapped(wording.text("office.take.unknown",
                         unknown.file().fingerprint())), accept);
             } else if (one instanceof RoundTaking.Taken taken) {
-                outcome.getChildren().add(Texts.wrapped(wording.text("office.take.taken", taken.rounds(),
-                        taken.results(), taken.notes())));
+                told("taken", Texts.wrapped(wording.text("office.take.taken", taken.rounds(), taken.results(),
+                        taken.notes())));
             } else if (one instanceof RoundTaking.Failed failed) {
-                outcome.getChildren().add(Texts.trouble(wording.sentence(failed.why())));
+                told("not-taken", Texts.trouble(wording.sentence(failed.why())));
             }
         });
+    }
+
+    private void told(String id, Label words) {
+        words.setId(id);
+        outcome.getChildren().add(words);
     }
 }

@@ -40,9 +40,11 @@ public final class StartModel {
     private final DoubleProperty loading = new SimpleDoubleProperty(-1);
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final BooleanBinding ready;
+    private final RoundTaking taking;
 
     public StartModel(Workplace workplace) {
         this.workplace = workplace;
+        this.taking = new RoundTaking(workplace);
         person.set(workplace.preferences().person());
         person.addListener((property, before, now) ->
                 workplace.preferencesProperty().set(workplace.preferences().withPerson(now.strip())));
@@ -54,12 +56,15 @@ public final class StartModel {
                 && cautionRead.get(), person, round, cautionRead);
     }
 
-    /** Told when there is a plant: the round that was walked last and is not finished, else the first one. */
+    /** Told when there is another plant: the chosen round as it is now, else the one that was walked last and is not finished, else the first one. */
     public void chooseRound() {
-        if (round.get() != null) {
+        List<Round> rounds = rounds();
+        Optional<Round> kept = Optional.ofNullable(round.get()).flatMap(chosen -> rounds.stream()
+                .filter(one -> one.id().equals(chosen.id())).findFirst());
+        if (kept.isPresent()) {
+            round.set(kept.get());
             return;
         }
-        List<Round> rounds = rounds();
         round.set(workplace.store().walks().stream().filter(walk -> walk.underWay())
                 .flatMap(walk -> rounds.stream().filter(one -> one.id().equals(walk.round()))).findFirst()
                 .orElse(rounds.isEmpty() ? null : rounds.get(0)));
@@ -103,6 +108,11 @@ public final class StartModel {
 
     public ReadOnlyObjectProperty<Optional<Defect>> troubleProperty() {
         return trouble.getReadOnlyProperty();
+    }
+
+    /** Takes the office's round files in. */
+    public RoundTaking taking() {
+        return taking;
     }
 
     public boolean hasPlant() {

@@ -11,6 +11,7 @@ import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.ChoiceRow;
 import bedmark.screen.part.FootBar;
 import bedmark.screen.part.Labels;
+import bedmark.screen.part.Pair;
 import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.Weight;
 import bedmark.screen.round.RoundModel;
@@ -26,7 +27,6 @@ import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
-import javafx.scene.control.ProgressBar;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
@@ -60,7 +60,7 @@ public final class StartView extends SidedScreen {
         settings.getStyleClass().add("secondary-target");
         frame(Heads.head(workplace, listening, wording.text("screen.name"), wording.text("screen.start.title"),
                 settings), footBar());
-        office = new RoundTakingPane(workplace, new RoundTaking(workplace), listening);
+        office = new RoundTakingPane(workplace, model.taking(), listening);
         questions.getStyleClass().add("questions");
         side.getStyleClass().add("safety-card");
         scroll.setFitToWidth(true);
@@ -77,8 +77,8 @@ public final class StartView extends SidedScreen {
         model.chooseRound();
         questions.getChildren().clear();
         if (!model.hasPlant() || model.loadingProperty().get() >= 0) {
-            offerDemo();
-            questions.getChildren().addAll(choice("screen.start.language", languages()), office);
+            questions.getChildren().addAll(new FirstStart(workplace, model, navigator, office),
+                    choice("screen.start.language", languages()));
             return;
         }
         person.setId("person");
@@ -90,9 +90,15 @@ public final class StartView extends SidedScreen {
         }
         Label name = new Label(wording.text("screen.start.person"));
         name.setLabelFor(person);
-        questions.getChildren().addAll(name, person, choice("screen.start.round", rounds()), progress(), limits(),
-                pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
-                pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())), office);
+        questions.getChildren().addAll(name, person);
+        if (model.rounds().isEmpty()) {
+            questions.getChildren().add(wrapped(wording.text("first.no-round")));
+        } else {
+            questions.getChildren().addAll(choice("screen.start.round", rounds()), progress());
+        }
+        questions.getChildren().addAll(limits(),
+                new Pair(choice("screen.start.units", units()), choice("screen.start.language", languages())),
+                new Pair(choice("screen.start.light", lights()), choice("screen.start.hand", hands())), office);
     }
 
     /** How far the chosen round is: in words, and as its strip of ticks. */
@@ -113,37 +119,6 @@ public final class StartView extends SidedScreen {
         SettingsModel settings = new SettingsModel(workplace);
         return Labels.wrapped("limits", wording.text("settings.limits.short", settings.changedLimits(),
                 settings.limits().size()));
-    }
-
-    private static HBox pair(VBox left, VBox right) {
-        HBox pair = new HBox(left, right);
-        pair.getStyleClass().add("pair");
-        for (VBox box : List.of(left, right)) {
-            box.setPrefWidth(100);
-            HBox.setHgrow(box, Priority.ALWAYS);
-        }
-        return pair;
-    }
-
-    private void offerDemo() {
-        if (!model.hasPlant()) {
-            questions.getChildren().add(wrapped(wording.text(model.canLoadDemo() ? "screen.start.empty"
-                    : "screen.start.empty-no-demo")));
-        }
-        model.troubleProperty().get().ifPresent(defect ->
-                questions.getChildren().add(wrapped(wording.sentence(defect))));
-        double share = model.loadingProperty().get();
-        if (share >= 0) {
-            ProgressBar bar = new ProgressBar(share);
-            bar.setMaxWidth(Double.MAX_VALUE);
-            questions.getChildren().addAll(wrapped(wording.text("screen.start.loading")), bar);
-        } else if (model.canLoadDemo()) {
-            ActionButton load = new ActionButton(Weight.PRIMARY, wording.text("screen.start.load-demo"),
-                    model::loadDemo);
-            load.setId("load-demo");
-            load.setMaxWidth(Double.MAX_VALUE);
-            questions.getChildren().add(load);
-        }
     }
 
     private ChoiceRow choice(String key, List<ChoiceRow.Option> options) {

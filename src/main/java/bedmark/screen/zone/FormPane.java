@@ -1,5 +1,6 @@
 package bedmark.screen.zone;
 
+import bedmark.document.Pointer;
 import bedmark.form.Section;
 import bedmark.screen.Listening;
 import bedmark.screen.part.CautionStrip;
@@ -7,7 +8,9 @@ import bedmark.screen.part.FieldBox;
 import bedmark.screen.part.SectionHeader;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import javafx.application.Platform;
 import javafx.scene.control.Label;
@@ -34,7 +37,11 @@ final class FormPane extends VBox {
     private final Label aside = new Label();
     private List<RowPlace> rows = List.of();
     private Optional<RowPlace> inHand = Optional.empty();
+    /** Which rows are in the list: from the one to before the other. */
+    private int from;
+    private int to;
     private boolean filling;
+    private boolean upright;
 
     /** @param large whether large keys take the room: one row is shown, and what is said of it stands elsewhere */
     FormPane(ZoneModel model, Wording wording, Listening listening, boolean large) {
@@ -60,6 +67,7 @@ final class FormPane extends VBox {
             VBox.setVgrow(scroll, Priority.ALWAYS);
             getChildren().addAll(header, scroll, caution);
         }
+        sceneProperty().addListener((property, before, now) -> fill());
         listening.to(model.rowsProperty(), this::layOut);
         listening.onChange(model.keptProperty(), kept -> rows.forEach(RowPlace::update));
         listening.onChange(model.typedProperty(), typed -> typed());
@@ -77,25 +85,49 @@ final class FormPane extends VBox {
         if (wanted.equals(rows.stream().map(RowPlace::row).toList())) {
             return;
         }
+        Map<Pointer, RowPlace> known = new HashMap<>();
+        rows.forEach(row -> known.put(row.row().place(), row));
         List<RowPlace> made = new ArrayList<>();
-        List<javafx.scene.Node> lines = new ArrayList<>();
-        Optional<Section> section = Optional.empty();
         for (SlotRow row : wanted) {
-            if (!section.equals(Optional.of(row.section()))) {
-                section = Optional.of(row.section());
-                if (!made.isEmpty()) {
-                    lines.add(new SectionHeader(title(row.section())));
-                }
-            }
-            RowPlace place = rows.stream().filter(known -> known.row().equals(row)).findFirst()
+            RowPlace place = Optional.ofNullable(known.get(row.place())).filter(before -> before.row().equals(row))
                     .orElseGet(() -> new RowPlace(row, model, wording, large));
+            place.turned(upright);
             made.add(place);
-            lines.add(place);
         }
-        list.getChildren().setAll(lines);
+        boolean first = rows.isEmpty();
         rows = made;
+        int index = active().map(rows::indexOf).orElse(0);
+        from = first ? Math.max(0, index - AHEAD / 2) : 0;
+        to = first ? Math.min(rows.size(), index + AHEAD) : rows.size();
+        list.getChildren().setAll(lines(from, to));
         activated();
         fill();
+    }
+
+    /** The rows of a range, each section but the first with its title before it. */
+    private List<javafx.scene.Node> lines(int first, int end) {
+        List<javafx.scene.Node> lines = new ArrayList<>();
+        for (int i = first; i < end; i++) {
+            Section section = rows.get(i).row().section();
+            if (i > 0 && !section.equals(rows.get(i - 1).row().section())) {
+                lines.add(new SectionHeader(title(section)));
+            }
+            lines.add(rows.get(i));
+        }
+        return lines;
+    }
+
+    /** Takes more rows into the list: those behind it, then those before it. */
+    private void lengthen(int count) {
+        if (to < rows.size()) {
+            int end = Math.min(rows.size(), to + count);
+            list.getChildren().addAll(lines(to, end));
+            to = end;
+        } else if (from > 0) {
+            int first = Math.max(0, from - count);
+            list.getChildren().addAll(0, lines(first, from));
+            from = first;
+        }
     }
 
     /** Builds the rows that are still to come, a few at a time, so that keys get their turn in between. */
@@ -108,15 +140,25 @@ final class FormPane extends VBox {
 
     private void fillSome() {
         filling = false;
-        List<RowPlace> next = rows.stream().filter(row -> !row.isBuilt()).limit(AT_A_TIME).toList();
+        if (getScene() == null || getScene().getWindow() == null || !getScene().getWindow().isShowing()) {
+            return;
+        }
+        lengthen(AT_A_TIME);
+        List<RowPlace> next = rows.subList(from, to).stream().filter(row -> !row.isBuilt()).limit(AT_A_TIME).toList();
         next.forEach(row -> {
             row.build();
             row.applyCss();
         });
-        if (!next.isEmpty()) {
+        if (!next.isEmpty() || from > 0 || to < rows.size()) {
             inHand.ifPresent(this::reveal);
             fill();
         }
+    }
+
+    /** Told when the tablet is turned. */
+    void turned(boolean portrait) {
+        upright = portrait;
+        rows.forEach(row -> row.turned(portrait));
     }
 
     private String title(Section section) {
@@ -141,6 +183,9 @@ final class FormPane extends VBox {
         inHand = active();
         inHand.ifPresent(row -> {
             int index = rows.indexOf(row);
+            while (index < from || index >= to) {
+                lengthen(rows.size());
+            }
             rows.subList(Math.max(0, index - AHEAD / 2), Math.min(rows.size(), index + AHEAD))
                     .forEach(RowPlace::build);
             row.update();

@@ -11,6 +11,7 @@ final class RowPlace extends StackPane {
     private final Wording wording;
     private final boolean quiet;
     private Optional<RowView> view = Optional.empty();
+    private boolean upright;
     private double widthAsked = Double.NaN;
     private double heightKnown;
 
@@ -39,10 +40,17 @@ final class RowPlace extends StackPane {
     RowView built() {
         if (view.isEmpty()) {
             view = Optional.of(new RowView(row, model, wording, quiet));
+            view.orElseThrow().turned(upright);
             getStyleClass().remove("to-come");
             getChildren().setAll(view.orElseThrow());
         }
         return view.orElseThrow();
+    }
+
+    /** Told when the tablet is turned. */
+    void turned(boolean portrait) {
+        upright = portrait;
+        view.ifPresent(row -> row.turned(portrait));
     }
 
     @Override

@@ -77,11 +77,12 @@ final class RowView extends VBox {
         if (cells.size() == 4) {
             GridPane grid = new GridPane();
             grid.getStyleClass().add("cells");
-            for (int i = 0; i < cells.size(); i++) {
-                GridPane.setHgrow(cells.get(i), Priority.ALWAYS);
-                cells.get(i).setPrefWidth(100);
-                grid.add(cells.get(i), i % 2, i / 2);
-            }
+            cells.forEach(cell -> {
+                GridPane.setHgrow(cell, Priority.ALWAYS);
+                cell.setPrefWidth(100);
+            });
+            grid.getChildren().addAll(cells);
+            turned(false);
             return grid;
         }
         HBox line = new HBox();
@@ -109,6 +110,16 @@ final class RowView extends VBox {
         button.getStyleClass().add("beside");
         button.setMinWidth(0);
         return button;
+    }
+
+    /** Four cells stand two by two, or side by side where the tablet stands upright. */
+    void turned(boolean upright) {
+        int across = upright ? 4 : 2;
+        int place = 0;
+        for (FieldBox cell : boxes.size() == 4 ? boxes.values() : List.<FieldBox>of()) {
+            GridPane.setConstraints(cell, place % across, place / across);
+            place++;
+        }
     }
 
     private FieldBox box(Slot slot) {

@@ -64,11 +64,11 @@ final class SlotWords {
         return node instanceof Node.Text text ? new Shown(words(slot, text.value()), "") : Shown.NOTHING;
     }
 
-    /** A choice in words; a material by its name. */
+    /** A choice in words, without what explains it behind a colon; a material by its name. */
     private String words(Slot slot, String code) {
         List<Choice> choices = choices(slot);
         return choices.stream().filter(choice -> choice.code().equals(code)).findFirst()
-                .map(choice -> choice.label().in(wording.words().language()))
+                .map(choice -> choice.label().in(wording.words().language()).split(": ", 2)[0])
                 .orElseGet(() -> isMaterial(slot) && register.materials().containsKey(code)
                         ? register.materials().get(code).name() : code);
     }

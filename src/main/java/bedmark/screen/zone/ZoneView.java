@@ -251,6 +251,7 @@ public final class ZoneView implements Screen {
             body.setLeft(work);
             body.setCenter(result);
         }
+        form.turned(portrait);
         entry.turned(portrait);
         hideRules();
         focusActive();

@@ -110,6 +110,24 @@ class PartsTest {
     }
 
     @Test
+    void narrowStripShowsTheTicksAroundTheOneInHand() throws Exception {
+        Glass.on(() -> {
+            RoundTicks strip = Samples.ticks(24);
+            Scene scene = Glass.show(new VBox(strip), Light.DAY, Density.standard(), 76, 60);
+            List<Node> shown = strip.getChildrenUnmodifiable().stream().filter(Node::isVisible).toList();
+            assertTrue(shown.contains(strip.getChildrenUnmodifiable().get(7)));
+            double last = Double.NEGATIVE_INFINITY;
+            for (Node tick : shown) {
+                assertTrue(tick.getBoundsInParent().getMinX() >= Math.max(0, last + 1));
+                last = tick.getBoundsInParent().getMaxX();
+            }
+            assertTrue(last <= 76 && shown.size() > 3);
+            scene.getWindow().hide();
+            return "";
+        });
+    }
+
+    @Test
     void buttonOfAnIconHasItsName() throws Exception {
         Glass.on(() -> {
             Button button = ActionButton.of(Icon.CAMERA, Weight.PLAIN, "photos", () -> { });

@@ -17,11 +17,9 @@ import com.fasterxml.jackson.core.io.JsonEOFException;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.math.BigDecimal;
-import java.nio.ByteBuffer;
-import java.nio.charset.CharacterCodingException;
-import java.nio.charset.CodingErrorAction;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -100,14 +98,13 @@ public final class JsonReader {
         }
     }
 
+    /** What is not UTF-8 is read as something else, and then does not give the same bytes again. */
     private static String decode(byte[] bytes) {
-        try {
-            String text = StandardCharsets.UTF_8.newDecoder().onMalformedInput(CodingErrorAction.REPORT)
-                    .onUnmappableCharacter(CodingErrorAction.REPORT).decode(ByteBuffer.wrap(bytes)).toString();
-            return text.startsWith("\uFEFF") ? text.substring(1) : text;
-        } catch (CharacterCodingException e) {
-            throw new Refused(Defect.in("", "json-not-utf8"), e);
+        String text = new String(bytes, StandardCharsets.UTF_8);
+        if (!Arrays.equals(text.getBytes(StandardCharsets.UTF_8), bytes)) {
+            throw new Refused(Defect.in("", "json-not-utf8"));
         }
+        return text.startsWith("\uFEFF") ? text.substring(1) : text;
     }
 
     private Branch document() throws IOException {

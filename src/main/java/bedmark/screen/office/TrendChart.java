@@ -66,7 +66,7 @@ final class TrendChart extends Pane {
     @Override
     protected void layoutChildren() {
         getChildren().clear();
-        double left = Math.max(60, getWidth() * 0.09);
+        double left = Math.max(84, getWidth() * 0.09);
         double width = getWidth() - left - 12;
         double height = getHeight() - 34;
         if (width <= 0 || height <= 0) {

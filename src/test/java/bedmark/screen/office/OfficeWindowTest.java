@@ -16,6 +16,9 @@ import java.util.List;
 import java.util.stream.Stream;
 import javafx.scene.Node;
 import javafx.scene.control.ListView;
+import javafx.scene.control.TableColumn;
+import javafx.scene.control.TableView;
+import javafx.scene.input.KeyCode;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -153,6 +156,47 @@ class OfficeWindowTest {
                 assertEquals(1, files.filter(file -> file.toString().endsWith(".round.json")).count());
             }
         }
+    }
+
+    @Test
+    void aCellIsTypedOverAndABadNumberLeavesTheRegisterAsItWas() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            window.click("room-register");
+            edit(window, "865 mm");
+            window.until(() -> spacing(window).equals("865"));
+            edit(window, "wide");
+            window.until(() -> window.words().contains("is no number"));
+            assertEquals("865", spacing(window));
+        }
+    }
+
+    private static String spacing(OfficeWindow window) {
+        return window.desk().store().registers().get("ostermere").transfer("TP-01").orElseThrow()
+                .quantity("skirtSpacing").orElseThrow().value().toPlainString();
+    }
+
+    private static void edit(OfficeWindow window, String text) throws Exception {
+        TableView<?> table = (TableView<?>) window.node("register-table");
+        Glass.on(() -> {
+            TableColumn<?, ?> column = table.getColumns().stream().filter(one -> one.getId()
+                    .equals("column-skirtSpacing")).findFirst().orElseThrow();
+            table.scrollToColumnIndex(table.getColumns().indexOf(column));
+            table.layout();
+            startEdit(table, column);
+            return null;
+        });
+        window.settle();
+        window.robot().push(KeyCode.SHORTCUT, KeyCode.A);
+        window.type(text);
+        window.robot().push(KeyCode.ENTER);
+        window.settle();
+    }
+
+    @SuppressWarnings("unchecked")
+    private static <T> void startEdit(TableView<T> table, TableColumn<?, ?> column) {
+        table.requestFocus();
+        table.edit(0, (TableColumn<T, ?>) column);
     }
 
     @Test

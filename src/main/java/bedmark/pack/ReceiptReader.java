@@ -3,15 +3,11 @@ package bedmark.pack;
 import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
-import bedmark.json.JsonWriter;
 import bedmark.json.ReceiptText;
 import java.io.IOException;
 import java.io.InputStream;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Arrays;
-import java.util.Base64;
 import java.util.HashSet;
 import java.util.Set;
 import java.util.UUID;
@@ -51,41 +47,17 @@ public final class ReceiptReader {
      * Proves a receipt. Only the spelling that {@link ReceiptWriter} writes is let in, so that one receipt is one
      * file.
      *
-     * @throws Refused the codes of {@link ReceiptText#read}, {@code receipt-key-wrong},
-     *                 {@code receipt-signature-wrong}, {@code receipt-survey-twice}
+     * @throws Refused the codes of {@link ReceiptText#read}, {@code signed-key-wrong},
+     *                 {@code signed-signature-wrong}, {@code receipt-survey-twice}
      */
     public static SignedReceipt read(byte[] bytes) {
         Branch document = ReceiptText.read(bytes);
-        Receipt receipt = new Receipt(document.without(ReceiptWriter.KEY).without(ReceiptWriter.SIGNATURE));
-        DeviceIdentity office = office(document);
-        byte[] signature = signature(document);
-        Branch signed = document.without(ReceiptWriter.SIGNATURE);
-        boolean spelled = Arrays.equals(bytes, JsonWriter.indented(signed.with(ReceiptWriter.SIGNATURE,
-                Base64.getEncoder().encodeToString(signature))));
-        if (!spelled || !office.proves(JsonWriter.compact(signed), signature)) {
-            throw new Refused(Defect.in("/signature", "receipt-signature-wrong"));
-        }
+        Receipt receipt = new Receipt(document.without(SignedJson.KEY).without(SignedJson.SIGNATURE));
+        Fingerprint office = SignedJson.prove(bytes, document);
         Set<UUID> seen = new HashSet<>();
         receipt.items().stream().filter(item -> !seen.add(item.survey())).findFirst().ifPresent(item -> {
             throw new Refused(Defect.in("/surveys", "receipt-survey-twice", item.survey().toString()));
         });
-        return new SignedReceipt(receipt, office.fingerprint(), document);
-    }
-
-    private static DeviceIdentity office(Branch document) {
-        String key = document.text(ReceiptWriter.KEY).orElseThrow();
-        try {
-            return DeviceIdentity.read(key.getBytes(StandardCharsets.UTF_8), "/key");
-        } catch (Refused e) {
-            throw new Refused(Defect.in("/key", "receipt-key-wrong"), e);
-        }
-    }
-
-    private static byte[] signature(Branch document) {
-        try {
-            return Base64.getDecoder().decode(document.text(ReceiptWriter.SIGNATURE).orElseThrow());
-        } catch (IllegalArgumentException e) {
-            throw new Refused(Defect.in("/signature", "receipt-signature-wrong"), e);
-        }
+        return new SignedReceipt(receipt, office, document);
     }
 }

@@ -1,27 +1,16 @@
 package bedmark.pack;
 
-import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
-import bedmark.json.JsonWriter;
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.ReadOnlyFileSystemException;
-import java.util.Base64;
 
-/**
- * Writes a receipt as one JSON file: the receipt, then {@code key} (the office's public key as PEM) and
- * {@code signature} (Ed25519 over the exact bytes of the same JSON without {@code signature}, without spaces and line
- * ends, as base64). It is proved outside with {@code jq -cj 'del(.signature)'} and {@code openssl pkeyutl -verify
- * -rawin}. The same receipt and key always give the same file.
- */
+/** Writes a receipt as one {@linkplain SignedJson signed} JSON file. The same receipt and key always give the same. */
 public final class ReceiptWriter {
-    static final String KEY = "key";
-    static final String SIGNATURE = "signature";
     private static final String ENDING = ".receipt.json";
 
     private final FileLayer disk;
@@ -38,10 +27,7 @@ public final class ReceiptWriter {
 
     /** The file's exact bytes. */
     public static byte[] text(Receipt receipt, DeviceKey office) {
-        Branch signed = receipt.document().without(SIGNATURE)
-                .with(KEY, new String(office.publicText(), StandardCharsets.US_ASCII));
-        return JsonWriter.indented(signed.with(SIGNATURE,
-                Base64.getEncoder().encodeToString(office.sign(JsonWriter.compact(signed)))));
+        return SignedJson.text(receipt.document(), office);
     }
 
     /**

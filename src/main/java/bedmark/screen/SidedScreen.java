@@ -1,7 +1,10 @@
 package bedmark.screen;
 
+import java.util.Optional;
 import javafx.scene.Node;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
 /** A screen of two parts: what is worked on, and beside it, or below it on an upright tablet, what it comes to. */
@@ -13,6 +16,7 @@ public abstract class SidedScreen implements Screen {
     /** The part beside it. */
     protected final VBox side = new VBox();
     private final String sideClass;
+    private Optional<ScrollPane> sideScroll = Optional.empty();
     private Node head;
     private Node foot;
 
@@ -52,6 +56,30 @@ public abstract class SidedScreen implements Screen {
         } else {
             body.setRight(side);
         }
+        sideScroll.ifPresent(scroll -> {
+            scroll.maxHeightProperty().unbind();
+            if (portrait) {
+                scroll.maxHeightProperty().bind(body.heightProperty().multiply(0.5));
+            } else {
+                scroll.setMaxHeight(Double.MAX_VALUE);
+            }
+        });
+    }
+
+    /** A long column that scrolls. */
+    protected static ScrollPane scrolling(VBox content) {
+        ScrollPane scroll = new ScrollPane(content);
+        scroll.setFitToWidth(true);
+        scroll.getStyleClass().add("form-scroll");
+        return scroll;
+    }
+
+    /** Fills the side with a column that scrolls; upright it takes at most the lower half. */
+    protected final void scrollSide(VBox content) {
+        ScrollPane scroll = scrolling(content);
+        side.getChildren().add(scroll);
+        VBox.setVgrow(scroll, Priority.ALWAYS);
+        sideScroll = Optional.of(scroll);
     }
 
     @Override

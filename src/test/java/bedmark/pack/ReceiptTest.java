@@ -95,13 +95,13 @@ class ReceiptTest {
     @Test
     void anotherSpellingOrAnotherKeyIsRefused() {
         byte[] text = ReceiptWriter.text(receipt, key);
-        assertEquals("receipt-signature-wrong", refusal(JsonWriter.compact(JsonReader.read(text).root())));
+        assertEquals("signed-signature-wrong", refusal(JsonWriter.compact(JsonReader.read(text).root())));
         byte[] other = ReceiptWriter.text(receipt, DeviceKey.of(folder.resolve("other")));
         Branch mixed = JsonReader.read(text).root()
                 .with("key", JsonReader.read(other).root().text("key").orElseThrow());
-        assertEquals("receipt-signature-wrong", refusal(JsonWriter.indented(mixed)));
-        assertEquals("receipt-key-wrong", refusal(JsonWriter.indented(mixed.with("key", "none"))));
-        assertEquals("receipt-signature-wrong", refusal(JsonWriter.indented(mixed.with("signature", "?"))));
+        assertEquals("signed-signature-wrong", refusal(JsonWriter.indented(mixed)));
+        assertEquals("signed-key-wrong", refusal(JsonWriter.indented(mixed.with("key", "none"))));
+        assertEquals("signed-signature-wrong", refusal(JsonWriter.indented(mixed.with("signature", "?"))));
     }
 
     @Test

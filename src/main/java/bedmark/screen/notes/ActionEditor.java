@@ -8,6 +8,8 @@ import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Icon;
 import bedmark.survey.PlannedAction;
+import bedmark.screen.part.Pair;
+import bedmark.screen.part.WrittenQuestion;
 import bedmark.wording.Wording;
 import java.time.LocalDate;
 import java.util.ArrayList;
@@ -63,7 +65,7 @@ final class ActionEditor extends VBox {
         header.asideProperty().set(before.assetId().isEmpty() ? "" : wording.text("notes.asset", before.assetId()));
         gap.managedProperty().bind(gap.textProperty().isNotEmpty());
         getChildren().addAll(header, field("action-what", "notes.what", what, before.what()), gap, phrases(),
-                pair(field("action-who", "notes.who", who, before.who()),
+                new Pair(field("action-who", "notes.who", who, before.who()),
                         field("action-order", "notes.work-order", workOrder, before.workOrder())),
                 days(), sealRow(), seals);
         seals.managedProperty().bind(seals.visibleProperty());
@@ -80,15 +82,8 @@ final class ActionEditor extends VBox {
     }
 
     private VBox field(String id, String question, TextField field, String text) {
-        field.setId(id);
         field.setText(text);
-        field.setAccessibleText(wording.text(question));
-        field.getStyleClass().add("secondary-target");
-        Label label = new Label(wording.text(question));
-        label.setLabelFor(field);
-        VBox box = new VBox(label, field);
-        box.getStyleClass().add("question");
-        return box;
+        return new WrittenQuestion(id, wording.text(question), field);
     }
 
     /** What is done most, in one press; more can be written behind it. */
@@ -224,15 +219,5 @@ final class ActionEditor extends VBox {
         control.setMaxWidth(Double.MAX_VALUE);
         control.setPrefWidth(100);
         HBox.setHgrow(control, Priority.ALWAYS);
-    }
-
-    private static HBox pair(VBox left, VBox right) {
-        HBox pair = new HBox(left, right);
-        pair.getStyleClass().add("pair");
-        for (VBox box : List.of(left, right)) {
-            box.setPrefWidth(100);
-            HBox.setHgrow(box, Priority.ALWAYS);
-        }
-        return pair;
     }
 }

@@ -28,10 +28,8 @@ import java.util.function.Consumer;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ProgressBar;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
 /** The way to the office: surveys into the queue, the queue onto a stick, the office's receipts back. */
@@ -47,7 +45,6 @@ public final class QueueView extends SidedScreen {
     private final Wording wording;
     private final VBox steps = new VBox();
     private final VBox outcome = new VBox();
-    private final ScrollPane sideScroll = scrolling(outcome);
     private final ProgressBar bar = new ProgressBar(0);
 
     public QueueView(Workplace workplace, QueueModel model, RoundModel round, Navigator navigator) {
@@ -66,8 +63,7 @@ public final class QueueView extends SidedScreen {
         steps.getStyleClass().add("questions");
         outcome.getStyleClass().add("questions-inside");
         side.getStyleClass().add("summary");
-        side.getChildren().add(sideScroll);
-        VBox.setVgrow(sideScroll, Priority.ALWAYS);
+        scrollSide(outcome);
         bar.setMaxWidth(Double.MAX_VALUE);
         bar.setAccessibleText(wording.text("screen.queue.exporting"));
         body.getStyleClass().add("queue-body");
@@ -82,25 +78,6 @@ public final class QueueView extends SidedScreen {
         listening.onChange(model.exportsProperty(), exports -> showOutcome());
         layOut();
         showOutcome();
-    }
-
-    private static ScrollPane scrolling(VBox content) {
-        ScrollPane scroll = new ScrollPane(content);
-        scroll.setFitToWidth(true);
-        scroll.getStyleClass().add("form-scroll");
-        return scroll;
-    }
-
-    /** Upright, what came out takes at most the lower half, and scrolls in it. */
-    @Override
-    public void turned(boolean portrait) {
-        super.turned(portrait);
-        sideScroll.maxHeightProperty().unbind();
-        if (portrait) {
-            sideScroll.maxHeightProperty().bind(body.heightProperty().multiply(0.5));
-        } else {
-            sideScroll.setMaxHeight(Double.MAX_VALUE);
-        }
     }
 
     private void progress(double share) {

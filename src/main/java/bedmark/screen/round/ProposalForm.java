@@ -4,6 +4,8 @@ import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Labels;
 import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
+import bedmark.screen.part.Pair;
+import bedmark.screen.part.WrittenQuestion;
 import bedmark.wording.Wording;
 import java.util.List;
 import java.util.Optional;
@@ -39,7 +41,7 @@ final class ProposalForm extends VBox {
         getChildren().addAll(new SectionHeader(wording.text("walk.propose.title")),
                 Labels.wrapped("words", wording.text("walk.propose.words")),
                 field("propose-tag", "walk.propose.tag", tag), gap,
-                pair(field("propose-from", "walk.propose.from", from),
+                new Pair(field("propose-from", "walk.propose.from", from),
                         field("propose-onto", "walk.propose.onto", onto)),
                 field("propose-note", "walk.propose.note", note), placeRow(), buttons());
     }
@@ -49,14 +51,7 @@ final class ProposalForm extends VBox {
     }
 
     private VBox field(String id, String question, TextField field) {
-        field.setId(id);
-        field.setAccessibleText(wording.text(question));
-        field.getStyleClass().add("secondary-target");
-        Label label = new Label(wording.text(question));
-        label.setLabelFor(field);
-        VBox box = new VBox(label, field);
-        box.getStyleClass().add("question");
-        return box;
+        return new WrittenQuestion(id, wording.text(question), field);
     }
 
     private HBox placeRow() {
@@ -107,15 +102,5 @@ final class ProposalForm extends VBox {
         List<RoundRow> rows = model.rowsProperty().get();
         model.propose(tag.getText(), from.getText(), onto.getText(),
                 rows.isEmpty() ? Optional.empty() : Optional.of(rows.get(after).transfer()), note.getText(), close);
-    }
-
-    private static HBox pair(VBox left, VBox right) {
-        HBox pair = new HBox(left, right);
-        pair.getStyleClass().add("pair");
-        for (VBox box : List.of(left, right)) {
-            box.setPrefWidth(100);
-            HBox.setHgrow(box, Priority.ALWAYS);
-        }
-        return pair;
     }
 }

@@ -15,6 +15,7 @@ import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Icon;
 import bedmark.screen.theme.TextSize;
+import bedmark.screen.part.Pair;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
 import java.math.BigDecimal;
@@ -72,15 +73,15 @@ public final class SettingsView extends SidedScreen {
     private void ask() {
         Preferences now = model.preferences();
         questions.getChildren().addAll(
-                pair(text("person", "settings.person", person, now.person()),
+                new Pair(text("person", "settings.person", person, now.person()),
                         text("device-name", "settings.device", device, model.deviceName())),
-                pair(row("settings.language", languages(now)), row("settings.light", lights(now))),
-                pair(row("settings.hand", hands(now)), row("settings.text", texts(now))),
+                new Pair(row("settings.language", languages(now)), row("settings.light", lights(now))),
+                new Pair(row("settings.hand", hands(now)), row("settings.text", texts(now))),
                 density(now),
                 new SectionHeader(wording.text("settings.units")), row("settings.units.system", systems(now)));
         List<SettingsModel.Measured> measured = model.measured();
         for (int i = 0; i < measured.size(); i += 2) {
-            questions.getChildren().add(pair(units(measured.get(i), now), units(measured.get(i + 1), now)));
+            questions.getChildren().add(new Pair(units(measured.get(i), now), units(measured.get(i + 1), now)));
         }
         questions.getChildren().addAll(new SectionHeader(wording.text("settings.folders")),
                 folder("watched", "settings.watched", now.watchedFolder(),
@@ -240,16 +241,6 @@ public final class SettingsView extends SidedScreen {
                 ((Label) label).setText(path.orElse(wording.text("settings.no-folder"))));
     }
 
-    private static HBox pair(VBox left, VBox right) {
-        HBox pair = new HBox(left, right);
-        pair.getStyleClass().add("pair");
-        for (VBox box : List.of(left, right)) {
-            box.setPrefWidth(100);
-            box.setMinWidth(0);
-            HBox.setHgrow(box, Priority.ALWAYS);
-        }
-        return pair;
-    }
 
     /** The limits: each rule with where it begins to warn and where it says overloaded, and who set it. */
     private void limits() {

@@ -1,6 +1,5 @@
 package bedmark.screen.start;
 
-import bedmark.document.Branch;
 import bedmark.screen.Heads;
 import bedmark.screen.SidedScreen;
 import bedmark.screen.Workplace;

@@ -29,7 +29,6 @@ import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.PasswordField;
 import javafx.scene.control.ProgressBar;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
@@ -44,7 +43,6 @@ public final class StoreView extends SidedScreen {
     private final Wording wording;
     private final VBox facts = new VBox();
     private final VBox outcome = new VBox();
-    private final ScrollPane sideScroll;
     private final ProgressBar bar = new ProgressBar(0);
     private final PasswordField passphrase = new PasswordField();
     private Optional<Path> sealedBackup = Optional.empty();
@@ -55,7 +53,6 @@ public final class StoreView extends SidedScreen {
         this.workplace = workplace;
         this.model = model;
         this.wording = workplace.wording();
-        this.sideScroll = scrolling(outcome);
         ActionButton foot = ActionButton.with(Icon.BACK, ContentDisplay.LEFT, Weight.QUIET,
                 wording.text("store.back"), back);
         foot.setId("foot-back");
@@ -64,8 +61,7 @@ public final class StoreView extends SidedScreen {
         facts.getStyleClass().add("questions");
         outcome.getStyleClass().add("questions-inside");
         side.getStyleClass().add("summary");
-        side.getChildren().add(sideScroll);
-        VBox.setVgrow(sideScroll, Priority.ALWAYS);
+        scrollSide(outcome);
         bar.setMaxWidth(Double.MAX_VALUE);
         bar.setAccessibleText(wording.text("store.working"));
         passphrase.setId("backup-passphrase");
@@ -78,25 +74,6 @@ public final class StoreView extends SidedScreen {
         listening.onChange(model.outcomeProperty(), told -> showOutcome());
         layOut();
         showOutcome();
-    }
-
-    private static ScrollPane scrolling(VBox content) {
-        ScrollPane scroll = new ScrollPane(content);
-        scroll.setFitToWidth(true);
-        scroll.getStyleClass().add("form-scroll");
-        return scroll;
-    }
-
-    /** Upright, what came out takes at most the lower half, and scrolls in it. */
-    @Override
-    public void turned(boolean portrait) {
-        super.turned(portrait);
-        sideScroll.maxHeightProperty().unbind();
-        if (portrait) {
-            sideScroll.maxHeightProperty().bind(body.heightProperty().multiply(0.5));
-        } else {
-            sideScroll.setMaxHeight(Double.MAX_VALUE);
-        }
     }
 
     private void progress(double share) {

@@ -4,6 +4,7 @@ import bedmark.index.Store;
 import bedmark.screen.BedmarkApp;
 import bedmark.screen.Shell;
 import bedmark.screen.Workplace;
+import bedmark.screen.part.Named;
 import bedmark.screen.zone.FormOpening;
 import java.lang.management.ManagementFactory;
 import java.nio.file.Path;
@@ -113,12 +114,12 @@ public final class ScreenProbe {
             }
             if (scene.lookup("#person") instanceof TextInputControl person) {
                 person.setText("A. Vale");
-                press("#caution-read");
-                press("#start-walk");
+                press("caution-read");
+                press("start-walk");
             } else if (opened.size() < WARM_UP + opens) {
                 openOrReturn();
             } else if (scene.lookup("#correct") != null) {
-                press("#correct");
+                press("correct");
             } else if (scene.lookup("#pad-next") == null) {
                 Optional.ofNullable(scene.lookup(DEPTH)).ifPresent(Node::requestFocus);
             } else if (typist.typed(now)) {
@@ -143,17 +144,17 @@ public final class ScreenProbe {
 
         private void openOrReturn() {
             if (scene.lookup("#verdict") != null) {
-                press("#foot-round");
-            } else if (scene.lookup("#stop-" + POINT) != null) {
+                press("foot-round");
+            } else if (Named.find(scene.getRoot(), "stop-" + POINT).isPresent()) {
                 waiting = true;
                 workedBefore = worked();
                 pressed = System.nanoTime();
-                press("#stop-" + POINT);
+                press("stop-" + POINT);
             }
         }
 
-        private void press(String id) {
-            Node node = scene.lookup(id);
+        private void press(String name) {
+            Node node = Named.find(scene.getRoot(), name).orElse(null);
             if (node instanceof ButtonBase button && !button.isDisabled()) {
                 button.fire();
             }

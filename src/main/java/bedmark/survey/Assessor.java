@@ -31,6 +31,10 @@ public final class Assessor {
     /** The ids of each conveyor's transfer points, in the register's order. */
     private final Map<String, List<String>> transfers = new HashMap<>();
 
+    /** A survey with what the engine sees of it. */
+    public record Seen(Survey survey, LoadingZone zone) {
+    }
+
     /** A survey with what the engine found. */
     public record Assessed(Survey survey, Assessment assessment) {
     }
@@ -158,15 +162,25 @@ public final class Assessor {
      * @throws Refused where a reading cannot be; the place is a pointer within the survey
      */
     public Assessment assess(Survey survey, Collection<Survey> companions) {
-        LoadingZone zone = zone(survey);
-        Drive drive = driveOf(survey);
-        for (Survey companion : companions) {
-            if (!companion.transfer().equals(survey.transfer())) {
-                sound(companion).ifPresent(other -> drive.put(companion, other));
+        return assess(new Seen(survey, zone(survey)), seen(companions));
+    }
+
+    /** As {@link #assess(Survey, Collection)}, with what the engine sees of them. */
+    public Assessment assess(Seen survey, Collection<Seen> companions) {
+        String transfer = survey.survey().transfer();
+        Drive drive = driveOf(survey.survey());
+        for (Seen companion : companions) {
+            if (!companion.survey().transfer().equals(transfer)) {
+                drive.put(companion.survey(), companion.zone());
             }
         }
-        drive.put(survey, zone);
-        return complete(assess(drive).zones().get(drive.transfers().indexOf(survey.transfer())), survey);
+        drive.put(survey.survey(), survey.zone());
+        return complete(assess(drive).zones().get(drive.transfers().indexOf(transfer)), survey.survey());
+    }
+
+    /** What the engine sees of surveys; one that cannot be is left out. */
+    public List<Seen> seen(Collection<Survey> surveys) {
+        return surveys.stream().flatMap(survey -> sound(survey).map(zone -> new Seen(survey, zone)).stream()).toList();
     }
 
     /** The surveys of each drive that count: of each transfer point the last one that is sound and not superseded. */

@@ -38,6 +38,9 @@ final class ZoneMapping {
     private static final String DEPTH = "depth";
     private static final String DEPTH_METHOD = "depthMethod";
 
+    /** Where each datum stands, read once: a key on the screen maps a zone. */
+    private static final Map<Datum, Pointer> PLACES = places();
+
     private final Map<String, Branch> sources;
     private final Taking taking;
     private final List<String> unfinished = new ArrayList<>();
@@ -104,6 +107,14 @@ final class ZoneMapping {
         };
     }
 
+    private static Map<Datum, Pointer> places() {
+        Map<Datum, Pointer> places = new EnumMap<>(Datum.class);
+        for (Datum datum : Datum.values()) {
+            places.put(datum, Pointer.parse(datum.pointer()));
+        }
+        return places;
+    }
+
     /** Whether some depth names no method of its own and the survey none for all: then it is taken at the board. */
     static boolean takesDepthsAtBoard(Survey survey) {
         return !survey.readings().has(DEPTH_METHOD)
@@ -140,7 +151,7 @@ final class ZoneMapping {
 
     /** What the documents of the survey hold; what was fitted from the site's drives stands elsewhere. */
     private Optional<Reading> number(Datum datum) {
-        Pointer place = Pointer.parse(datum.pointer());
+        Pointer place = PLACES.get(datum);
         Branch source = sources.getOrDefault(place.tokens().get(0), Branch.EMPTY);
         Pointer inside = new Pointer(place.tokens().subList(1, place.tokens().size()));
         Optional<Node> node = source.at(inside).filter(found -> !(found instanceof Node.Blank));

@@ -45,7 +45,12 @@ public final class ZoneSketcher {
      * @param active the line of the table of depths that the person has in hand
      */
     public ZoneSketch sketch(Branch document, Optional<Assessment> assessment, Optional<Integer> active) {
-        LoadingZone zone = zone(document);
+        return sketch(document, zone(document), assessment, active);
+    }
+
+    /** The same, with what the engine sees of the survey. */
+    public ZoneSketch sketch(Branch document, LoadingZone zone, Optional<Assessment> assessment,
+                             Optional<Integer> active) {
         OptionalDouble length = number(zone, Datum.ZONE_LENGTH);
         OptionalDouble height = number(zone, Datum.READ_HEIGHT, Datum.REGISTER_HEIGHT);
         OptionalDouble spacing = number(zone, Datum.READ_SPACING, Datum.REGISTER_SPACING);

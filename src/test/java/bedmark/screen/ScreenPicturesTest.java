@@ -4,6 +4,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.screen.start.StartModel;
 import bedmark.screen.start.StartView;
+import bedmark.screen.start.UnlockModel;
+import bedmark.screen.start.UnlockView;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
@@ -14,6 +16,7 @@ import java.time.ZoneOffset;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import javafx.application.Platform;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.input.KeyCode;
 import javafx.scene.layout.BorderPane;
@@ -67,7 +70,13 @@ class ScreenPicturesTest {
 
     private void start() throws Exception {
         take("empty");
+        app.click("new-plant");
+        app.until(() -> app.has("make-plant"));
+        take("new-plant");
+        app.click("foot-back");
+        app.until(() -> app.has("load-demo"));
         loading();
+        locked();
         app.click("load-demo");
         app.until(() -> app.has("person"));
         app.click("person");
@@ -165,6 +174,24 @@ class ScreenPicturesTest {
         app.settle();
     }
 
+    /** A store that takes a passphrase asks for it before there is a shell. */
+    private void locked() throws Exception {
+        Glass.on(() -> {
+            UnlockModel model = new UnlockModel(passphrase -> app.workplace().store(), Platform::runLater);
+            BorderPane root = (BorderPane) app.shell().scene().getRoot();
+            root.setTop(null);
+            root.setCenter(new UnlockView(app.workplace().wording(), model, store -> { }));
+            root.setBottom(null);
+            return null;
+        });
+        take("unlock");
+        Glass.on(() -> {
+            app.shell().toStart();
+            return null;
+        });
+        app.settle();
+    }
+
     private void round() throws Exception {
         app.click("start-walk");
         app.until(() -> app.has("search"));
@@ -241,6 +268,14 @@ class ScreenPicturesTest {
     private void queue() throws Exception {
         app.click("to-queue");
         takeAll("queue");
+        app.click("to-store");
+        app.until(() -> app.has("prove"));
+        take("store");
+        app.click("prove");
+        app.until(() -> app.has("prove") && app.has("outcome"));
+        take("store-proved");
+        app.click("foot-back");
+        app.until(() -> app.has("queue-all"));
         app.click("queue-all");
         app.exportsTo(Path.of("/media/usb-stick"));
         app.click("export");

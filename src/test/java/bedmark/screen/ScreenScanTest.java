@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.screen.part.CautionStrip;
+import bedmark.screen.part.Named;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
 import bedmark.screen.theme.TextSize;
@@ -43,13 +44,15 @@ class ScreenScanTest {
         }
     }
 
-    /** Every two of language, light, hand and density meet in one of these; all of them meet at full size. */
+    /** Every two of language, light, hand and density meet in one of these, and both hands larger type; all meet at full size. */
     private static final List<Look> PAIRS = List.of(new Look(Locale.ENGLISH, false, false, 149, TextSize.STANDARD),
             new Look(SPANISH, true, true, 149, TextSize.STANDARD),
             new Look(SPANISH, false, false, 224, TextSize.STANDARD),
             new Look(Locale.ENGLISH, true, true, 224, TextSize.STANDARD),
             new Look(Locale.ENGLISH, false, true, 299, TextSize.STANDARD),
-            new Look(SPANISH, true, false, 299, TextSize.STANDARD));
+            new Look(SPANISH, true, false, 299, TextSize.STANDARD),
+            new Look(SPANISH, false, false, 149, TextSize.LARGE),
+            new Look(Locale.ENGLISH, true, true, 149, TextSize.LARGE));
 
     private static final List<Look> LOOKS = Boolean.getBoolean("bedmark.scan.full") ? all() : PAIRS;
 
@@ -59,7 +62,9 @@ class ScreenScanTest {
             for (boolean night : List.of(false, true)) {
                 for (boolean gloves : List.of(false, true)) {
                     for (double dpi : List.of(149.0, 224.0, 299.0)) {
-                        looks.add(new Look(language, night, gloves, dpi, TextSize.STANDARD));
+                        for (TextSize text : TextSize.values()) {
+                            looks.add(new Look(language, night, gloves, dpi, text));
+                        }
                     }
                 }
             }
@@ -82,6 +87,11 @@ class ScreenScanTest {
                 Clock.systemUTC(), width, height)) {
             app = opened;
             scan("empty", false);
+            app.click("new-plant");
+            app.until(() -> app.has("make-plant"));
+            scan("new-plant", false);
+            app.click("foot-back");
+            app.until(() -> app.has("load-demo"));
             app.click("load-demo");
             app.until(() -> app.has("person"));
             app.click("person");
@@ -140,6 +150,11 @@ class ScreenScanTest {
             app.click("foot-back");
             app.click("to-queue");
             scan("queue", false);
+            app.click("to-store");
+            app.until(() -> app.has("prove"));
+            scan("store", false);
+            app.click("foot-back");
+            app.until(() -> app.has("queue-all"));
             app.click("queue-all");
             app.click("export");
             app.until(() -> app.has("receipt"));
@@ -159,7 +174,7 @@ class ScreenScanTest {
                 for (String press : presses) {
                     scene.getRoot().applyCss();
                     scene.getRoot().layout();
-                    ((ButtonBase) scene.lookup("#" + press)).fire();
+                    ((ButtonBase) Named.find(scene.getRoot(), press).orElseThrow()).fire();
                 }
                 Density density = Shell.density(app.workplace().preferences());
                 ScreenScan.of(scene.getRoot(), density, Math.rint(scene.getWidth() * look.scale()),

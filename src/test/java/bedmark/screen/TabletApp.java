@@ -1,6 +1,7 @@
 package bedmark.screen;
 
 import bedmark.index.Store;
+import bedmark.screen.part.Named;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Optional;
@@ -122,12 +123,12 @@ public final class TabletApp implements AutoCloseable {
         settle();
     }
 
-    /** The node with an id. */
+    /** The node with a name or an id. */
     public Node node(String id) {
         return find(id).orElseThrow(() -> new AssertionError("there is nothing called " + id));
     }
 
-    /** Whether there is a node with that id. */
+    /** Whether there is a node with that name or id. */
     public boolean has(String id) {
         return find(id).isPresent();
     }
@@ -135,7 +136,7 @@ public final class TabletApp implements AutoCloseable {
     /** Looks on the screen's own thread, since the screen may be changing. */
     private Optional<Node> find(String id) {
         try {
-            return Glass.on(() -> Optional.ofNullable(shell.scene().lookup("#" + id)));
+            return Glass.on(() -> Named.find(shell.scene().getRoot(), id));
         } catch (Exception e) {
             throw new IllegalStateException("the screen cannot be searched", e);
         }

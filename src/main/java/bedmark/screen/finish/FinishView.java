@@ -11,6 +11,7 @@ import bedmark.screen.part.Figure;
 import bedmark.screen.part.FigureBlock;
 import bedmark.screen.part.FootBar;
 import bedmark.screen.part.Labels;
+import bedmark.screen.part.Named;
 import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.Weight;
@@ -132,7 +133,7 @@ public final class FinishView extends SidedScreen {
         HBox.setHgrow(words, Priority.ALWAYS);
         ActionButton open = new ActionButton(Weight.PLAIN, wording.text("finish.open"),
                 () -> navigator.toZone(model.round(), judged.row()));
-        open.setId("open-" + judged.row().transfer());
+        Named.as(open, "open-" + judged.row().transfer());
         open.setAccessibleText(wording.text("finish.open") + " " + judged.row().tag());
         open.getStyleClass().add("secondary-target");
         HBox row = new HBox(new LevelGlyph(shape), words, open);
@@ -151,11 +152,17 @@ public final class FinishView extends SidedScreen {
             boolean begun = row.progress() == RoundRow.Progress.BEGUN;
             ActionButton open = new ActionButton(Weight.PLAIN, begun
                     ? wording.text("finish.begun", row.tag()) : row.tag(), () -> navigator.toZone(model.round(), row));
-            open.setId("gap-" + row.transfer());
+            Named.as(open, "gap-" + row.transfer());
             open.getStyleClass().add("secondary-target");
             tags.getChildren().add(open);
         }
-        return tags;
+        ActionButton over = new ActionButton(Weight.PLAIN, wording.text("finish.hand-over"),
+                () -> navigator.toStore(() -> navigator.toFinish(model.round())));
+        over.setId("hand-over");
+        over.getStyleClass().add("secondary-target");
+        VBox box = new VBox(tags, over);
+        box.getStyleClass().add("gaps");
+        return box;
     }
 
     private void total(WalkTotal total) {

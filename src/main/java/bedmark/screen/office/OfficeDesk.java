@@ -11,6 +11,7 @@ import bedmark.screen.PreferencesFile;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
 import java.time.Clock;
+import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Executor;
 import java.util.concurrent.ExecutorService;
@@ -37,6 +38,7 @@ public final class OfficeDesk implements AutoCloseable {
     private final ObjectProperty<Preferences> preferences;
     private final DoubleProperty progress = new SimpleDoubleProperty(-1);
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final ReadOnlyObjectWrapper<List<Defect>> found;
     private final ReadOnlyIntegerWrapper changes = new ReadOnlyIntegerWrapper();
     private final AtomicBoolean stop = new AtomicBoolean();
     private final ExecutorService work = Executors.newSingleThreadExecutor(run -> {
@@ -56,6 +58,7 @@ public final class OfficeDesk implements AutoCloseable {
         this.clock = clock;
         this.screen = screen;
         this.folders = folders;
+        this.found = new ReadOnlyObjectWrapper<>(store.found());
         this.file = new PreferencesFile(store.folder());
         this.preferences = new SimpleObjectProperty<>(file.read());
         preferences.addListener((property, before, now) -> file.write(now));
@@ -98,6 +101,16 @@ public final class OfficeDesk implements AutoCloseable {
     /** What went wrong last, until something goes well. */
     public ReadOnlyObjectProperty<Optional<Defect>> troubleProperty() {
         return trouble.getReadOnlyProperty();
+    }
+
+    /** What was not as it was written when the store was opened, until somebody has read it. */
+    public ReadOnlyObjectProperty<List<Defect>> foundProperty() {
+        return found.getReadOnlyProperty();
+    }
+
+    /** Somebody has read what was found. */
+    public void seen() {
+        found.set(List.of());
     }
 
     /** Counts the changes of the store that were made here. */

@@ -15,6 +15,7 @@ import bedmark.survey.merge.ZoneId;
 import bedmark.wording.Wording;
 import java.util.Locale;
 import javafx.application.Platform;
+import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.Label;
@@ -41,6 +42,8 @@ public final class OfficeShell {
             this.code = code;
         }
     }
+
+    private static final int FOUND_SHOWN = 4;
 
     private final OfficeDesk desk;
     private final BorderPane root = new BorderPane();
@@ -132,7 +135,7 @@ public final class OfficeShell {
         TopBar bar = new TopBar(more);
         bar.titleProperty().set(wording.text("screen.name"));
         bar.subtitleProperty().set(wording.text("office.title"));
-        return new VBox(bar, rooms(wording), progress(wording), trouble(wording));
+        return new VBox(bar, rooms(wording), progress(wording), found(wording), trouble(wording));
     }
 
     private Node rooms(Wording wording) {
@@ -166,6 +169,25 @@ public final class OfficeShell {
             // Work that is done at once would only flicker.
             box.setVisible(share.doubleValue() > 0);
             bar.setProgress(share.doubleValue());
+        });
+        return box;
+    }
+
+    private Node found(Wording wording) {
+        VBox sentences = new VBox();
+        sentences.setMinWidth(0);
+        HBox.setHgrow(sentences, Priority.ALWAYS);
+        ActionButton seen = new ActionButton(Weight.PLAIN, wording.text("office.seen"), desk::seen);
+        seen.setId("found-seen");
+        seen.setMinWidth(Region.USE_PREF_SIZE);
+        HBox box = new HBox(sentences, seen);
+        box.getStyleClass().add("trouble");
+        box.setAlignment(Pos.CENTER_LEFT);
+        box.managedProperty().bind(box.visibleProperty());
+        shown.to(desk.foundProperty(), defects -> {
+            box.setVisible(!defects.isEmpty());
+            sentences.getChildren().setAll(defects.stream().limit(FOUND_SHOWN)
+                    .map(defect -> Texts.trouble(wording.sentence(defect))).toList());
         });
         return box;
     }

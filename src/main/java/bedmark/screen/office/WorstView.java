@@ -16,7 +16,8 @@ import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListView;
 import javafx.scene.input.KeyCode;
-import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import javafx.util.StringConverter;
@@ -24,20 +25,30 @@ import javafx.util.StringConverter;
 /** The loading zones of all plants, worst first. */
 final class WorstView extends VBox {
     private static final List<Integer> AGES = List.of(30, 90, 200, 365);
+    /** Below this width a row has no room for the area beside the name. */
+    private static final double NARROW = 1000;
 
     private final WorstModel model;
     private final Wording wording;
+    private final GridPane filters = new GridPane();
+    private boolean narrow;
 
     WorstView(OfficeDesk desk, WorstModel model, Listening listening, Consumer<ZoneId> open) {
         this.model = model;
         this.wording = desk.wording();
         getStyleClass().add("room");
-        FlowPane filters = new FlowPane();
         filters.getStyleClass().add("filters");
-        listening.to(model.allProperty(), all -> filters.getChildren().setAll(filters()));
+        listening.to(model.allProperty(), all -> layOut());
         ListView<RankedZone> list = new ListView<>(model.zones());
         list.setId("zones");
-        list.setCellFactory(view -> new ZoneCell(wording));
+        list.setCellFactory(view -> new ZoneCell(wording, () -> narrow));
+        widthProperty().addListener((property, before, now) -> {
+            if (narrow != now.doubleValue() < NARROW) {
+                narrow = !narrow;
+                layOut();
+                list.refresh();
+            }
+        });
         list.setPlaceholder(new Label(wording.text("office.worst.none")));
         list.setOnMouseClicked(event -> chosen(list, open));
         list.setOnKeyPressed(event -> {
@@ -58,6 +69,22 @@ final class WorstView extends VBox {
         Optional.ofNullable(list.getSelectionModel().getSelectedItem()).map(RankedZone::zone).ifPresent(open);
     }
 
+    /** The filters in one row, or in two where the window is held upright. */
+    private void layOut() {
+        List<VBox> all = filters();
+        int columns = narrow ? all.size() / 2 : all.size();
+        filters.getChildren().clear();
+        filters.getColumnConstraints().clear();
+        for (int i = 0; i < columns; i++) {
+            ColumnConstraints column = new ColumnConstraints();
+            column.setPercentWidth(100.0 / columns);
+            filters.getColumnConstraints().add(column);
+        }
+        for (int i = 0; i < all.size(); i++) {
+            filters.add(all.get(i), i % columns, i / columns);
+        }
+    }
+
     private List<VBox> filters() {
         return List.of(
                 filter("area", model.areaProperty(), model.choices(zone -> some(zone.names().area())), text -> text),
@@ -76,6 +103,7 @@ final class WorstView extends VBox {
                             Function<T, String> shown) {
         ComboBox<Optional<T>> box = new ComboBox<>();
         box.setId("filter-" + name);
+        box.setMaxWidth(Double.MAX_VALUE);
         List<Optional<T>> items = new ArrayList<>(List.of(Optional.empty()));
         choices.forEach(choice -> items.add(Optional.of(choice)));
         box.getItems().setAll(items);

@@ -11,6 +11,7 @@ import bedmark.survey.InspectionStatus;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.BooleanSupplier;
 import java.util.stream.Collectors;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
@@ -24,9 +25,12 @@ import javafx.scene.layout.VBox;
 /** One loading zone in the list. */
 final class ZoneCell extends ListCell<RankedZone> {
     private final Wording wording;
+    private final BooleanSupplier narrow;
 
-    ZoneCell(Wording wording) {
+    /** @param narrow whether there is no room for the area beside the name */
+    ZoneCell(Wording wording, BooleanSupplier narrow) {
         this.wording = wording;
+        this.narrow = narrow;
         getStyleClass().add("zone-cell");
         setPrefWidth(0);
     }
@@ -57,14 +61,22 @@ final class ZoneCell extends ListCell<RankedZone> {
         Label name = label("zone-name", zone.names().tag() + "  ›  " + zone.names().conveyorTag());
         Label where = label("soft", String.join(", ", List.of(zone.names().area(), zone.names().plant())));
         name.setMinWidth(Region.USE_PREF_SIZE);
-        HBox first = new HBox(name, where);
-        first.getStyleClass().add("line");
-        first.setAlignment(Pos.BASELINE_LEFT);
+        VBox words = new VBox();
+        if (narrow.getAsBoolean()) {
+            where.setWrapText(true);
+            where.setMinHeight(Region.USE_PREF_SIZE);
+            words.getChildren().addAll(name, where);
+        } else {
+            HBox first = new HBox(name, where);
+            first.getStyleClass().add("line");
+            first.setAlignment(Pos.BASELINE_LEFT);
+            words.getChildren().add(first);
+        }
         Label findings = label("findings", wording.text("office.place." + zone.place().code()) + (zone.open().isEmpty()
                 ? "" : ": " + zone.open().stream().map(this::finding).collect(Collectors.joining(", "))));
         findings.setWrapText(true);
         findings.setMinHeight(Region.USE_PREF_SIZE);
-        VBox words = new VBox(first, findings);
+        words.getChildren().add(findings);
         words.setMinWidth(0);
         HBox.setHgrow(words, Priority.ALWAYS);
         HBox row = new HBox(glyph, words, plates(zone), numbers(zone));

@@ -9,6 +9,7 @@ import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.CautionStrip;
 import bedmark.screen.part.FootBar;
 import bedmark.screen.part.Labels;
+import bedmark.screen.part.Named;
 import bedmark.screen.part.Plate;
 import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.SectionHeader;
@@ -196,7 +197,7 @@ public final class RoundView extends SidedScreen {
         ActionButton open = new ActionButton(Weight.PLAIN, "", () -> navigator.toZone(model, row));
         open.setGraphic(content);
         open.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
-        open.setId("stop-" + row.transfer());
+        Named.as(open, "stop-" + row.transfer());
         open.setAccessibleText(row.tag() + ", " + row.what() + ", " + now(row).map(now -> now + ", ").orElse("")
                 + due(row).map(due -> due + ", ").orElse("") + last(row)
                 + (row.notes() > 0 ? ", " + wording.text("walk.notes", row.notes()) : ""));
@@ -211,7 +212,7 @@ public final class RoundView extends SidedScreen {
         line.getStyleClass().add("row");
         if (row.progress() == RoundRow.Progress.TO_DO || row.progress() == RoundRow.Progress.BEGUN) {
             ActionButton skip = new ActionButton(Weight.QUIET, wording.text("screen.round.skip"), () -> askWhy(row));
-            skip.setId("skip-" + row.transfer());
+            Named.as(skip, "skip-" + row.transfer());
             skip.getStyleClass().add("secondary-target");
             line.getChildren().add(skip);
         }
@@ -276,7 +277,7 @@ public final class RoundView extends SidedScreen {
 
     /** Brings the stop where the walk goes on in sight, with the one before it. */
     private void revealNext() {
-        model.nextToDo("").flatMap(row -> Optional.ofNullable(list.lookup("#stop-" + row.transfer())))
+        model.nextToDo("").flatMap(row -> Named.find(list, "stop-" + row.transfer()))
                 .ifPresent(stop -> {
                     double room = scroll.getViewportBounds().getHeight();
                     double all = list.getBoundsInLocal().getHeight();

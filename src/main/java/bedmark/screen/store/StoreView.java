@@ -99,6 +99,7 @@ public final class StoreView extends SidedScreen {
                 new SectionHeader(wording.text("store.backup")), backup(known),
                 button("back-up", Weight.PRIMARY, "store.back-up",
                         () -> chosen("store.back-up.where", model::backUp)),
+                Texts.wrapped(wording.text("store.hand-over")),
                 new SectionHeader(wording.text("store.other")), Texts.wrapped(wording.text("store.other.what")),
                 button("take-over", Weight.PLAIN, "store.take-over",
                         () -> chosen("store.take-over.where", backup -> takeOver(backup, Optional.empty()))));

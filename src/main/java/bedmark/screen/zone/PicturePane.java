@@ -8,7 +8,6 @@ import bedmark.picture.Snap;
 import bedmark.picture.ZoneSketch;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
-import bedmark.quantity.UnitSystem;
 import bedmark.screen.theme.Density;
 import bedmark.wording.Wording;
 import bedmark.wording.ZoneSketcher;
@@ -62,7 +61,10 @@ final class PicturePane extends StackPane {
 
     private ZoneSketch sketch() {
         Branch document = model.surveyProperty().get();
-        ZoneSketch sketch = sketcher.sketch(document, found(), BedLines.lineOf(model.active()));
+        Optional<Integer> line = BedLines.lineOf(model.active());
+        ZoneSketch sketch = model.outcomeProperty().get().zone()
+                .map(zone -> sketcher.sketch(document, zone, found(), line))
+                .orElseGet(() -> sketcher.sketch(document, found(), line));
         return asked.map(speed -> speed.over(sketch, document)).orElse(sketch);
     }
 
@@ -83,7 +85,12 @@ final class PicturePane extends StackPane {
     }
 
     private Snap snap() {
-        return wording.units() == UnitSystem.US ? Snap.INCH : Snap.METRIC;
+        return inches() ? Snap.INCH : Snap.METRIC;
+    }
+
+    /** A depth is pulled in the unit that the person reads it in. */
+    private boolean inches() {
+        return wording.smallLength() == Unit.INCH;
     }
 
     private void ask(boolean speed) {
@@ -188,10 +195,10 @@ final class PicturePane extends StackPane {
 
         /** Whole steps as an exact decimal of the person's own unit. */
         private Quantity quantity(Snap.Stepped stepped) {
-            boolean us = wording.units() == UnitSystem.US;
-            BigDecimal step = us ? new BigDecimal(stepped.step() > 0.01 ? "2" : "0.25")
+            boolean inches = inches();
+            BigDecimal step = inches ? new BigDecimal(stepped.step() > 0.01 ? "2" : "0.25")
                     : new BigDecimal(stepped.step() > 0.01 ? "50" : "5");
-            return Quantity.of(step.multiply(BigDecimal.valueOf(stepped.steps())), us ? Unit.INCH : Unit.MILLIMETRE);
+            return Quantity.of(step.multiply(BigDecimal.valueOf(stepped.steps())), inches ? Unit.INCH : Unit.MILLIMETRE);
         }
     }
 }

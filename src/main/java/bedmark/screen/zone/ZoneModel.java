@@ -5,6 +5,7 @@ import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
 import bedmark.engine.Assessment;
+import bedmark.engine.LoadingZone;
 import bedmark.form.Measure;
 import bedmark.form.SpeedField;
 import bedmark.quantity.BeltState;
@@ -14,6 +15,7 @@ import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.TypedNumber;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
+import bedmark.survey.Assessor;
 import bedmark.survey.Survey;
 import bedmark.survey.SurveyHistory;
 import java.util.HashSet;
@@ -39,6 +41,7 @@ import javafx.beans.value.ObservableValue;
  */
 public final class ZoneModel {
     private final ZoneSetting setting;
+    private final List<Assessor.Seen> companions;
     private final SpeedWays ways = new SpeedWays();
     private final UnitChoice unitChoice = new UnitChoice();
     private final Set<Pointer> believed = new HashSet<>();
@@ -72,6 +75,7 @@ public final class ZoneModel {
      */
     public ZoneModel(ZoneSetting setting, UnitSystem units, Locale locale) {
         this.setting = setting;
+        this.companions = setting.assessor().seen(setting.companions());
         this.judging = new Judging(setting);
         this.work = new SurveyInWork(setting.history(), setting.scribe(), setting.person());
         this.tables = new Tables(this, work, setting.last());
@@ -110,8 +114,12 @@ public final class ZoneModel {
                 .orElseGet(() -> slots().get(0));
     }
 
-    /** What the survey comes to: an assessment, or why there can be none. */
-    public record Outcome(Optional<Assessment> assessment, Optional<Refused> impossible) {
+    /**
+     * What the survey comes to: an assessment, or why there can be none.
+     *
+     * @param zone what the engine sees of the survey, where it can be
+     */
+    public record Outcome(Optional<Assessment> assessment, Optional<Refused> impossible, Optional<LoadingZone> zone) {
     }
 
     public ZoneSetting setting() {
@@ -452,11 +460,14 @@ public final class ZoneModel {
     }
 
     private Outcome judge(Branch document) {
+        Assessor assessor = setting.assessor();
         try {
-            return new Outcome(Optional.of(setting.assessor().assess(new Survey(document), setting.companions())),
-                    Optional.empty());
+            Survey judged = new Survey(document);
+            LoadingZone zone = assessor.zone(judged);
+            return new Outcome(Optional.of(assessor.assess(new Assessor.Seen(judged, zone), companions)),
+                    Optional.empty(), Optional.of(zone));
         } catch (Refused e) {
-            return new Outcome(Optional.empty(), Optional.of(e));
+            return new Outcome(Optional.empty(), Optional.of(e), Optional.empty());
         }
     }
 

@@ -81,6 +81,22 @@ class OfficeWindowTest {
     }
 
     @Test
+    void whatWasNotAsItWasWrittenIsSaidUntilSomebodyHasReadIt() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            assertFalse(window.node("found-seen").getParent().isVisible());
+        }
+        Path tables = folder.resolve("office").resolve("index").resolve("office.mv.db");
+        Files.write(tables, new byte[] {1, 2, 3});
+        try (OfficeWindow window = window(1280, 800)) {
+            assertTrue(window.words().contains(tables.getParent().toString()), window.words());
+            window.click("found-seen");
+            assertFalse(window.node("found-seen").getParent().isVisible());
+            assertEquals(3, window.desk().store().packs().size());
+        }
+    }
+
+    @Test
     void theWorstZoneIsOpenedAndItsFindingAccepted() throws Exception {
         try (OfficeWindow window = window(1280, 800)) {
             receiveAll(window);

@@ -1,0 +1,35 @@
+package bedmark.screen.part;
+
+import java.util.Optional;
+import javafx.scene.Node;
+import javafx.scene.Parent;
+
+/**
+ * Names of nodes that are as many as a plant has transfer points. As ids of the toolkit each of them, and everything
+ * within it, would be given resolved styles of its own, which are kept for as long as the program runs.
+ */
+public final class Named {
+    private Named() {
+    }
+
+    /** Names a node. */
+    public static void as(Node node, String name) {
+        node.getProperties().put(Named.class, name);
+    }
+
+    /** The first node at or below another that goes by a name, or by an id. */
+    public static Optional<Node> find(Node root, String name) {
+        if (name.equals(root.getId()) || root.hasProperties() && name.equals(root.getProperties().get(Named.class))) {
+            return Optional.of(root);
+        }
+        if (root instanceof Parent parent) {
+            for (Node child : parent.getChildrenUnmodifiable()) {
+                Optional<Node> found = find(child, name);
+                if (found.isPresent()) {
+                    return found;
+                }
+            }
+        }
+        return Optional.empty();
+    }
+}

@@ -27,7 +27,7 @@ final class ZoneCell extends ListCell<RankedZone> {
     private final Wording wording;
     private final BooleanSupplier narrow;
 
-    /** @param narrow whether there is no room for the area beside the name */
+    /** @param narrow whether there is room for one column of numbers only, and none for the area beside the name */
     ZoneCell(Wording wording, BooleanSupplier narrow) {
         this.wording = wording;
         this.narrow = narrow;
@@ -118,6 +118,12 @@ final class ZoneCell extends ListCell<RankedZone> {
         Label saving = label("saving", zone.saving().map(one -> wording.text("office.worst.saving",
                 wording.format().computed(one.wh() / 1e6, 1))).orElse(""));
         Label age = label("soft", age(zone));
+        if (narrow.getAsBoolean()) {
+            VBox one = new VBox(share, saving, age);
+            one.getStyleClass().addAll("numbers", "wide");
+            one.setMinWidth(Region.USE_PREF_SIZE);
+            return one;
+        }
         VBox left = new VBox(share, power);
         VBox right = new VBox(saving, age);
         left.getStyleClass().add("numbers");

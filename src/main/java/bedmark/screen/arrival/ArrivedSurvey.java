@@ -33,17 +33,22 @@ import java.util.UUID;
 public record ArrivedSurvey(Survey survey, String point, String conveyor, FieldForm form,
                             Optional<Assessment> assessment, Optional<Defect> impossible, boolean replaced) {
 
-    /** What is replaced comes last, before it what was not inspected; the others by their level. */
+    /** What is replaced comes last, before it what was not inspected; the others by their level, then today's. */
     private static final Comparator<ArrivedSurvey> WORST_FIRST = Comparator.comparing(ArrivedSurvey::replaced)
             .thenComparing(ArrivedSurvey::inspected, Comparator.reverseOrder())
-            .thenComparing(ArrivedSurvey::level, Comparator.reverseOrder());
+            .thenComparing(ArrivedSurvey::level, Comparator.reverseOrder())
+            .thenComparing(ArrivedSurvey::today, Comparator.reverseOrder());
 
     public boolean inspected() {
         return survey.inspectionStatus() == InspectionStatus.INSPECTED;
     }
 
-    /** How it stands; what can't be judged is as good as incomplete. */
+    /** How the office ranks it, today or at design feed; what can't be judged is as good as incomplete. */
     public Level level() {
+        return assessment.map(Assessment::worstLevel).orElse(Level.INCOMPLETE);
+    }
+
+    private Level today() {
         return assessment.map(Assessment::level).orElse(Level.INCOMPLETE);
     }
 

@@ -7,6 +7,7 @@ import bedmark.screen.theme.LevelShape;
 import bedmark.wording.Telling;
 import bedmark.wording.Told;
 import bedmark.wording.Wording;
+import java.util.Optional;
 import javafx.geometry.Pos;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListCell;
@@ -29,7 +30,8 @@ final class SurveyCell extends ListCell<ArrivedSurvey> {
         setText(null);
         boolean bare = empty || survey == null;
         setGraphic(bare ? null : row(survey));
-        setAccessibleText(bare ? null : survey.point() + ": " + verdict(survey));
+        setAccessibleText(bare ? null : survey.point() + ": " + verdict(survey)
+                + atDesign(survey).map(told -> " " + told).orElse(""));
     }
 
     private HBox row(ArrivedSurvey survey) {
@@ -41,15 +43,27 @@ final class SurveyCell extends ListCell<ArrivedSurvey> {
         if (survey.replaced()) {
             names.getChildren().add(new Plate(Plate.Tone.FAINT, wording.text("arrival.replaced")));
         }
-        Label verdict = Labels.wrapped("verdict-line", verdict(survey));
-        verdict.getStyleClass().add(shape.styleClass());
-        VBox words = new VBox(names, verdict);
+        VBox words = new VBox(names, line(verdict(survey), survey.assessment().map(one ->
+                LevelShape.valueOf(one.level().name())).orElse(shape)));
+        atDesign(survey).ifPresent(told -> words.getChildren().add(line(told, shape)));
         words.setMinWidth(0);
         HBox.setHgrow(words, Priority.ALWAYS);
         HBox row = new HBox(new LevelGlyph(shape), words);
         row.getStyleClass().addAll("rule-row", "ranked");
         row.setAlignment(Pos.CENTER_LEFT);
         return row;
+    }
+
+    private static Label line(String told, LevelShape shape) {
+        Label line = Labels.wrapped("verdict-line", told);
+        line.getStyleClass().add(shape.styleClass());
+        return line;
+    }
+
+    /** The verdict at design feed, where it is worse than today's and so the one that the shape shows. */
+    private Optional<String> atDesign(ArrivedSurvey survey) {
+        return survey.assessment().filter(one -> one.worstLevel() != one.level())
+                .flatMap(one -> new Telling(wording, survey.form()).tell(one).atDesign());
     }
 
     private static LevelShape shape(ArrivedSurvey survey) {

@@ -60,11 +60,11 @@ class ArrivalModelTest {
     }
 
     @Test
-    void surveysAreJudgedAsTheAssessCommandDoesAndStandWorstFirst() throws Exception {
+    void surveysAreJudgedAsTheOfficeDoesAndStandWorstFirst() throws Exception {
         Bundle bundle = Offices.sample("round-under-way");
         Map<UUID, Level> judged = new HashMap<>();
         new Assessor(bundle.register()).assess(bundle.surveys()).forEach(one ->
-                judged.put(one.survey().id(), one.assessment().level()));
+                judged.put(one.survey().id(), one.assessment().worstLevel()));
         try (ArrivalModel model = model()) {
             settle(model);
             List<ArrivedSurvey> surveys = assertInstanceOf(Arrived.Pack.class, model.arrivedProperty().get()

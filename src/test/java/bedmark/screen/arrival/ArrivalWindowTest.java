@@ -55,7 +55,7 @@ class ArrivalWindowTest {
             String words = window.words();
             for (String told : List.of(bundle.document().branch("device").flatMap(device -> device.text("name"))
                     .orElseThrow(), bundle.register().name(), worst.point(), "Overloaded: ",
-                    "Stay outside the guards", "valid: nothing was changed since")) {
+                    "at design feed: Overloaded", "Stay outside the guards", "valid: nothing was changed since")) {
                 assertTrue(words.contains(told), told + " in " + words);
             }
             assertTrue(words.replace("\n", "").contains(Offices.fingerprint(folder.resolve("tablet"))), words);

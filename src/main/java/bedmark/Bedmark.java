@@ -7,7 +7,9 @@ import bedmark.index.StoreFolder;
 import bedmark.index.StoreOptions;
 import bedmark.office.OfficeOptions;
 import bedmark.office.OfficeStore;
+import bedmark.pack.FileKind;
 import bedmark.screen.BedmarkApp;
+import bedmark.screen.arrival.ArrivalApp;
 import bedmark.screen.office.OfficeApp;
 import bedmark.words.Words;
 import java.io.PrintWriter;
@@ -31,14 +33,26 @@ public final class Bedmark {
         Optional<Path> home = Optional.ofNullable(System.getProperty("bedmark.home")).map(Path::of);
         Surroundings surroundings = new Surroundings(new PrintWriter(System.out, true, StandardCharsets.UTF_8),
                 new PrintWriter(System.err, true, StandardCharsets.UTF_8), home, Clock.systemDefaultZone(),
-                new Words(Locale.ENGLISH), Bedmark::open);
+                new Words(Locale.ENGLISH), Bedmark::open, Bedmark::show);
         System.exit(BedmarkCommand.run(surroundings, arguments));
     }
 
-    /** The window needs a display: on Linux an X or Wayland server that the environment names. */
-    private static boolean open(Path folder, Optional<Path> samples, boolean load) {
+    /** A window needs a display: on Linux an X or Wayland server that the environment names. */
+    private static boolean hasDisplay() {
         boolean linux = System.getProperty("os.name", "").toLowerCase(Locale.ROOT).contains("linux");
-        if (linux && System.getenv("DISPLAY") == null && System.getenv("WAYLAND_DISPLAY") == null) {
+        return !linux || System.getenv("DISPLAY") != null || System.getenv("WAYLAND_DISPLAY") != null;
+    }
+
+    private static boolean show(Path file, FileKind kind) {
+        if (!hasDisplay()) {
+            return false;
+        }
+        TOOLKIT.setLevel(Level.SEVERE);
+        return ArrivalApp.open(file, kind, Path.of(System.getProperty("user.home")), Clock.systemDefaultZone());
+    }
+
+    private static boolean open(Path folder, Optional<Path> samples, boolean load) {
+        if (!hasDisplay()) {
             return false;
         }
         TOOLKIT.setLevel(Level.SEVERE);

@@ -1,11 +1,7 @@
 package bedmark.command;
 
 import bedmark.command.AssessCommand.Judged;
-import bedmark.document.Branch;
-import bedmark.document.Refused;
-import bedmark.form.FieldForm;
-import bedmark.form.Texts;
-import bedmark.json.FormReader;
+import bedmark.json.SurveyForm;
 import bedmark.survey.Assessor.Assessed;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.Register;
@@ -15,7 +11,6 @@ import bedmark.wording.Telling;
 import bedmark.wording.Wording;
 import java.io.PrintWriter;
 import java.util.List;
-import java.util.Optional;
 
 /** Assessments as text for a person at a terminal: one block a survey. */
 final class AssessmentText {
@@ -54,7 +49,7 @@ final class AssessmentText {
                     survey.document().text("statusReason").orElse("")));
             return;
         }
-        Told told = new Telling(wording, form(survey, judged.bundle().forms())).tell(assessed.assessment());
+        Told told = new Telling(wording, SurveyForm.of(survey, judged.bundle().forms())).tell(assessed.assessment());
         line(out, "  " + told.sentence() + told.sure().map(sure -> " (" + sure + ")").orElse(""));
         told.figures().forEach(figure -> line(out, "    " + figure.label() + ": " + figure.number() + " "
                 + figure.rest()));
@@ -69,21 +64,5 @@ final class AssessmentText {
         String round = survey.round().orElse("");
         return transfer.tag() + transfer.from().map(from -> "  " + from).orElse("")
                 + " > " + register.conveyorOf(transfer).tag() + (round.isEmpty() ? "" : "  [" + round + "]") + revision;
-    }
-
-    /** The form that the survey was made with; without a whole one the readings go by their keys. */
-    static FieldForm form(Survey survey, List<Branch> forms) {
-        Optional<String> id = survey.document().branch("form").flatMap(form -> form.text("id"));
-        return forms.stream().filter(form -> id.isPresent() && form.text("id").equals(id)).findFirst()
-                .flatMap(AssessmentText::whole)
-                .orElseGet(() -> new FieldForm("none", 1, Texts.of("", ""), List.of()));
-    }
-
-    private static Optional<FieldForm> whole(Branch form) {
-        try {
-            return Optional.of(FormReader.read(form));
-        } catch (Refused e) {
-            return Optional.empty();
-        }
     }
 }

@@ -3,20 +3,36 @@ package bedmark.command;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.wording.Wording;
+import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.regex.Pattern;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
 
 /** The program's one command and its ways of failing: one sentence on standard error and the right exit code. */
 @Command(name = "bedmark", mixinStandardHelpOptions = true, versionProvider = ProgramVersion.class,
         description = "Loading-zone surveys of belt conveyors: recorded on a tablet, judged on the spot.",
-        footer = {"", "Without a command the tablet app opens.",
+        footer = {"", "Without a command the tablet app opens; with a file a window shows what is in it.",
             "Exit codes: 0 fine, 1 something overloaded, 2 bad use, 3 unreadable input,",
             "4 something undecided or incomplete."})
 public final class BedmarkCommand implements Callable<Integer> {
+    /** What is more likely a command mistyped than a file. */
+    private static final Pattern WORD = Pattern.compile("[\\p{L}-]+");
+
     private final Surroundings surroundings;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Parameters(paramLabel = "FILE", arity = "0..1",
+            description = "A pack, round file or receipt to look at, and to receive.")
+    private Optional<Path> file;
 
     private BedmarkCommand(Surroundings surroundings) {
         this.surroundings = surroundings;
@@ -60,6 +76,13 @@ public final class BedmarkCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
+        if (file.isPresent()) {
+            if (WORD.matcher(file.get().toString()).matches() && !Files.exists(file.get())) {
+                throw new ParameterException(spec.commandLine(),
+                        "'" + file.get() + "' is neither a command nor a file");
+            }
+            return new FileShowing(surroundings).show(file.get());
+        }
         return OpenCommand.open(surroundings, OpenCommand.ownStore(), false);
     }
 

@@ -7,11 +7,11 @@ import bedmark.document.Refused;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.json.JsonReader;
+import bedmark.pack.FileKind;
 import bedmark.pack.PackLimits;
 import bedmark.pack.PackReader;
 import bedmark.survey.Bundle;
 import java.io.IOException;
-import java.io.InputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -78,7 +78,7 @@ final class BundleSource {
 
     private static Named one(Path file) throws Exception {
         InputFile.requireFile(file);
-        if (isArchive(file)) {
+        if (FileKind.isArchive(file)) {
             return in(file, () -> new Named(file,
                     new PackReader(PackLimits.STANDARD, BundleReader::read).open(file, Progress.NONE).bundle(),
                             UnaryOperator.identity()));
@@ -86,15 +86,5 @@ final class BundleSource {
         byte[] bytes = InputFile.read(file);
         return in(file, () -> new Named(file, BundleReader.read(bytes),
                 defect -> JsonReader.read(bytes).placed(defect)));
-    }
-
-    /** Told by its first bytes, since a pack keeps its kind when its name is changed. */
-    private static boolean isArchive(Path file) {
-        try (InputStream stream = Files.newInputStream(file)) {
-            byte[] start = stream.readNBytes(2);
-            return start.length == 2 && start[0] == 'P' && start[1] == 'K';
-        } catch (IOException e) {
-            throw new Refused(Defect.in(file.toString(), "file-unreadable"), e);
-        }
     }
 }

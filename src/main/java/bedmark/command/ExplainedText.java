@@ -3,6 +3,7 @@ package bedmark.command;
 import bedmark.document.Branch;
 import bedmark.engine.Engine;
 import bedmark.form.FieldForm;
+import bedmark.json.SurveyForm;
 import bedmark.survey.Assessor;
 import bedmark.survey.Assessor.Assessed;
 import bedmark.survey.InspectionStatus;
@@ -36,7 +37,7 @@ final class ExplainedText {
     void print(Register register, Assessor assessor, List<Assessed> surveys, List<Branch> forms, PrintWriter out) {
         for (Assessed assessed : surveys) {
             Survey survey = assessed.survey();
-            FieldForm form = AssessmentText.form(survey, forms);
+            FieldForm form = SurveyForm.of(survey, forms);
             head(survey, register, assessor).forEach(line -> CalculationSheet.wrapped(line).forEach(out::println));
             if (survey.inspectionStatus() == InspectionStatus.INSPECTED) {
                 Told told = new Telling(wording, form).tell(assessed.assessment());

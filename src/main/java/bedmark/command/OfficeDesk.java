@@ -25,7 +25,7 @@ final class OfficeDesk {
 
     OfficeStore open(Surroundings surroundings, ProgressLine progress) {
         OfficeOptions options = OfficeOptions.of(surroundings.clock()).withProgress(progress::at);
-        Path home = Path.of(System.getProperty("user.home"), ".bedmark-office");
+        Path home = Path.of(System.getProperty("user.home"), OfficeStore.USUAL_FOLDER);
         if (store != null && OfficeStore.isServer(store)) {
             return OfficeStore.open(store, own == null ? home : own, options);
         }

@@ -7,15 +7,25 @@ import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
 
-/** Opens the tablet app; without a display it says so and assesses the sample round instead. */
+/** Opens the tablet app or shows a file; without a display it says so and prints what can be read instead. */
 @Command(name = "open", mixinStandardHelpOptions = true,
-        description = "Opens the tablet app (the default without a command).")
+        description = "Opens the tablet app (the default without a command), or shows a pack, round file or receipt.")
 final class OpenCommand implements Callable<Integer> {
     private static final String SAMPLE_ROUND = "round-under-way.json";
 
     private final Surroundings surroundings;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Parameters(paramLabel = "FILE", arity = "0..1", description = "A pack, round file or receipt to look at.")
+    private Optional<Path> file;
 
     @Option(names = "--store", paramLabel = "DIR", description = "Folder of the store; made when it is not there.")
     private Optional<Path> store;
@@ -29,6 +39,12 @@ final class OpenCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
+        if (file.isPresent()) {
+            if (store.isPresent() || demo) {
+                throw new ParameterException(spec.commandLine(), "a file is shown without --store and --demo");
+            }
+            return new FileShowing(surroundings).show(file.get());
+        }
         return open(surroundings, store.orElseGet(OpenCommand::ownStore), demo);
     }
 

@@ -26,6 +26,10 @@ final class PackVerifyCommand implements Callable<Integer> {
     @Override
     public Integer call() throws Exception {
         InputFile.requireFile(pack);
+        return verify(surroundings, pack);
+    }
+
+    static int verify(Surroundings surroundings, Path pack) throws Exception {
         ReadPack read;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             read = BedmarkCommand.in(pack, () ->

@@ -1,5 +1,6 @@
 package bedmark.command;
 
+import bedmark.pack.FileKind;
 import bedmark.quantity.UnitSystem;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
@@ -17,9 +18,10 @@ import java.util.Optional;
  * @param clock   the time
  * @param words   the words of the commands
  * @param opening opens the tablet app
+ * @param showing shows a file that came
  */
 public record Surroundings(PrintWriter out, PrintWriter err, Optional<Path> home, Clock clock, Words words,
-                           Opening opening) {
+                           Opening opening, Showing showing) {
 
     /** How the person at the terminal is told things. */
     Wording wording() {
@@ -38,5 +40,17 @@ public record Surroundings(PrintWriter out, PrintWriter err, Optional<Path> home
          * @return whether a window could be opened; without a display it could not
          */
         boolean open(Path store, Optional<Path> samples, boolean load);
+    }
+
+    /** Shows a file that a tablet or an office wrote, and returns when the window is closed. */
+    @FunctionalInterface
+    public interface Showing {
+        /**
+         * Shows a file.
+         *
+         * @param kind what it is; whether it is sound is found out in sight of the person
+         * @return whether a window could be opened; without a display it could not
+         */
+        boolean show(Path file, FileKind kind);
     }
 }

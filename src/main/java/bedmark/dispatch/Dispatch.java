@@ -30,6 +30,9 @@ import java.util.UUID;
 public final class Dispatch {
     private static final DateTimeFormatter NAME_TIME = DateTimeFormatter.ofPattern("yyyyMMdd-HHmmss");
 
+    /** How the names of packs end: desktops tell files by what follows, and any archive ends with {@code .zip}. */
+    private static final String ENDING = ".pack.zip";
+
     private final Store store;
 
     public Dispatch(Store store) {
@@ -65,7 +68,7 @@ public final class Dispatch {
     /** The pack's name: when its surveys were ready, and the bundle's id. */
     static String fileName(Bundle bundle) {
         return "bedmark-" + NAME_TIME.format(bundle.document().time("createdAt").orElseThrow()) + "-"
-                + bundle.document().text("id").orElseThrow().substring(0, 8) + ".zip";
+                + bundle.document().text("id").orElseThrow().substring(0, 8) + ENDING;
     }
 
     private PhotoSource photos() {

@@ -114,6 +114,11 @@ public record Assessment(Optional<DragMethod> method, Map<Result, Estimate> resu
                 missingRequired, sidesWithoutSeals, powerShares, leading, repeat);
     }
 
+    /** Today's verdict or the one at design throughput, whichever is worse: half a feed makes no zone healthy. */
+    public Level worstLevel() {
+        return levelAtDesignFeed.map(level::or).orElse(level);
+    }
+
     /** The depth that may not be overstepped at the board and the rule that sets it, where one is known. */
     public Optional<AllowedDepth> lowestAllowedDepth() {
         return allowedDepths.stream().filter(depth -> depth.overloaded().isPresent())

@@ -91,15 +91,10 @@ final class Judge {
 
     /** The worst first: by level, then share of the drive; the digest decides where both are the same. */
     static final Comparator<JudgedZone> WORST_FIRST = Comparator.<JudgedZone, Level>comparing(zone ->
-                    level(zone.assessment())).reversed()
+                    zone.assessment().worstLevel()).reversed()
             .thenComparing(Comparator.<JudgedZone>comparingDouble(zone ->
                     value(zone.assessment(), Result.DRIVE_SHARE).orElse(-1)).reversed())
             .thenComparing(zone -> zone.copy().digest());
-
-    /** Today's level or the one at design feed, whichever is worse: half a feed makes no zone healthy. */
-    static Level level(Assessment assessment) {
-        return assessment.levelAtDesignFeed().map(assessment.level()::or).orElse(assessment.level());
-    }
 
     static OptionalDouble value(Assessment assessment, Result result) {
         return assessment.get(result).map(Estimate::value).map(OptionalDouble::of).orElse(OptionalDouble.empty());
@@ -114,7 +109,7 @@ final class Judge {
     /** An assessment in the numbers that lists rank by. */
     static Verdict verdict(Assessment assessment) {
         Optional<Remedy> best = best(assessment);
-        return new Verdict(level(assessment).ordinal(), !assessment.missingRequired().isEmpty(),
+        return new Verdict(assessment.worstLevel().ordinal(), !assessment.missingRequired().isEmpty(),
                 value(assessment, Result.DRIVE_SHARE), value(assessment, Result.SKIRT_POWER),
                 best.map(Remedy::savedWh).orElse(OptionalDouble.empty()),
                 best.map(Remedy::savedCost).orElse(OptionalDouble.empty()),

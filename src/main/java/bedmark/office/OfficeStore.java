@@ -48,6 +48,9 @@ import java.util.function.Function;
  * away. All methods may be called from any thread; they wait for the store's own.
  */
 public final class OfficeStore implements AutoCloseable {
+    /** The folder in a person's home that is the office's unless they say otherwise. */
+    public static final String USUAL_FOLDER = ".bedmark-office";
+
     private static final String LOCK = "store.lock";
     static final String PACKS = "packs";
     private static final String PASSING = "passing";

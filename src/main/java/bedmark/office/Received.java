@@ -49,5 +49,10 @@ public sealed interface Received {
      * @param fingerprint of the key that signed it, where the pack itself is sound
      */
     record Turned(Path file, Defect why, Optional<String> fingerprint) implements Received {
+
+        /** Whether it is sound, and only nobody has vouched for its device yet. */
+        public boolean untrusted() {
+            return why.code().equals("device-untrusted");
+        }
     }
 }

@@ -11,7 +11,8 @@ import java.nio.file.ReadOnlyFileSystemException;
 
 /** Writes a receipt as one {@linkplain SignedJson signed} JSON file. The same receipt and key always give the same. */
 public final class ReceiptWriter {
-    private static final String ENDING = ".receipt.json";
+    /** How the usual names of receipts end. */
+    public static final String ENDING = ".receipt.json";
 
     private final FileLayer disk;
 

@@ -1,11 +1,9 @@
 package bedmark.report;
 
 import bedmark.document.Branch;
-import bedmark.document.Refused;
 import bedmark.form.FieldForm;
-import bedmark.form.Texts;
 import bedmark.journal.Progress;
-import bedmark.json.FormReader;
+import bedmark.json.SurveyForm;
 import bedmark.office.JudgedZone;
 import bedmark.office.OfficeStore;
 import bedmark.office.Place;
@@ -30,7 +28,6 @@ import java.util.Optional;
  * @param zones  every loading zone, worst first
  */
 public record ReportContent(OffsetDateTime madeAt, List<String> plants, List<ReportZone> zones) {
-    private static final FieldForm NO_FORM = new FieldForm("none", 1, Texts.of("", ""), List.of());
 
     public ReportContent {
         plants = List.copyOf(plants);
@@ -97,21 +94,9 @@ public record ReportContent(OffsetDateTime madeAt, List<String> plants, List<Rep
                     Optional.ofNullable(store.surveys(List.of(copy.digest())).get(copy.digest())));
         }
 
-        /** The form of the survey; without a whole one the readings go by their keys. */
         private FieldForm form(Survey survey, String plant) {
-            Optional<String> id = survey.document().branch("form").flatMap(form -> form.text("id"));
-            return forms.computeIfAbsent(plant, key -> store.head(key).map(head -> head.branches("forms"))
-                            .orElse(List.of())).stream()
-                    .filter(form -> id.isPresent() && form.text("id").equals(id)).findFirst()
-                    .flatMap(Gathering::whole).orElse(NO_FORM);
-        }
-
-        private static Optional<FieldForm> whole(Branch form) {
-            try {
-                return Optional.of(FormReader.read(form));
-            } catch (Refused e) {
-                return Optional.empty();
-            }
+            return SurveyForm.of(survey, forms.computeIfAbsent(plant, key -> store.head(key)
+                    .map(head -> head.branches("forms")).orElse(List.of())));
         }
     }
 }

@@ -5,6 +5,7 @@ import bedmark.document.Refused;
 import bedmark.journal.NotSaved;
 import bedmark.journal.Progress;
 import java.util.Optional;
+import java.util.concurrent.Executor;
 import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.function.Consumer;
 import javafx.beans.property.DoubleProperty;
@@ -14,7 +15,8 @@ import javafx.beans.property.SimpleDoubleProperty;
 
 /** Work that takes time: done beside the screen, one at a time, with its progress, a way to stop it, its trouble. */
 public final class Errand {
-    private final Workplace workplace;
+    private final Executor beside;
+    private final Executor screen;
     private final DoubleProperty progress = new SimpleDoubleProperty(-1);
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final AtomicBoolean cancelled = new AtomicBoolean();
@@ -25,8 +27,20 @@ public final class Errand {
         T run(Progress progress);
     }
 
+    /** Work at a tablet's workplace. */
     public Errand(Workplace workplace) {
-        this.workplace = workplace;
+        this(workplace.longWork(), workplace.screen());
+    }
+
+    /**
+     * Work of any window.
+     *
+     * @param beside does it
+     * @param screen runs what touches the screen
+     */
+    public Errand(Executor beside, Executor screen) {
+        this.beside = beside;
+        this.screen = screen;
     }
 
     /** How far it is, 0 to 1; negative while nothing runs. */
@@ -60,10 +74,10 @@ public final class Errand {
         cancelled.set(false);
         progress.set(0);
         trouble.set(Optional.empty());
-        workplace.longWork().execute(() -> {
+        beside.execute(() -> {
             try {
                 T result = work.run(told());
-                workplace.screen().execute(() -> {
+                screen.execute(() -> {
                     progress.set(-1);
                     done.accept(result);
                 });
@@ -78,7 +92,7 @@ public final class Errand {
     }
 
     private void failed(Defect defect) {
-        workplace.screen().execute(() -> {
+        screen.execute(() -> {
             progress.set(-1);
             trouble.set(Optional.of(defect));
         });
@@ -95,7 +109,7 @@ public final class Errand {
                 int hundredths = (int) (share * 100);
                 if (hundredths != shown) {
                     shown = hundredths;
-                    workplace.screen().execute(() -> progress.set(progress.get() < 0 ? -1 : share));
+                    screen.execute(() -> progress.set(progress.get() < 0 ? -1 : share));
                 }
             }
 

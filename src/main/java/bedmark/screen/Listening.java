@@ -23,6 +23,11 @@ public final class Listening {
         endings.add(() -> value.removeListener(listener));
     }
 
+    /** Does something more when the listening ends. */
+    public void onEnd(Runnable ending) {
+        endings.add(ending);
+    }
+
     /** Listens to nothing any more. */
     public void end() {
         endings.forEach(Runnable::run);

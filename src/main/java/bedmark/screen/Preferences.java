@@ -12,7 +12,7 @@ import java.util.Map;
 import java.util.Optional;
 
 /**
- * How one person likes the tablet; kept with the store, and no part of a survey.
+ * How one person likes the screens; kept with the store, and no part of a survey.
  *
  * @param person        the name that stands beside each entry; empty until it is given
  * @param locale        language and number format
@@ -24,10 +24,12 @@ import java.util.Optional;
  * @param text          how large type is
  * @param exportFolder  where packs went last
  * @param watchedFolder where the tablet's camera app puts its photos
+ * @param officeFolder  where packs that were looked at were received last
  */
 public record Preferences(String person, Locale locale, UnitSystem units, Map<Unit, Unit> chosenUnits,
                           Lighting lighting, boolean gloves, double dpi, TextSize text,
-                          Optional<String> exportFolder, Optional<String> watchedFolder) {
+                          Optional<String> exportFolder, Optional<String> watchedFolder,
+                          Optional<String> officeFolder) {
 
     /** The density of a 10.1-inch screen of 1280 by 800 dots. */
     public static final double USUAL_DPI = 149;
@@ -44,7 +46,7 @@ public record Preferences(String person, Locale locale, UnitSystem units, Map<Un
     /** What a new tablet starts with. */
     public static Preferences standard() {
         return new Preferences("", Locale.ENGLISH, UnitSystem.METRIC, Map.of(), Lighting.DAY, false, USUAL_DPI,
-                TextSize.STANDARD, Optional.empty(), Optional.empty());
+                TextSize.STANDARD, Optional.empty(), Optional.empty(), Optional.empty());
     }
 
     /** Reads what was kept; what is not there is as on a new tablet. */
@@ -60,7 +62,7 @@ public record Preferences(String person, Locale locale, UnitSystem units, Map<Un
                 document.number("dpi").map(BigDecimal::doubleValue).filter(dpi -> dpi >= 60 && dpi <= 600)
                         .orElse(USUAL_DPI),
                 document.text("text").flatMap(TextSize::ofCode).orElse(TextSize.STANDARD),
-                document.text("exportFolder"), document.text("watchedFolder"));
+                document.text("exportFolder"), document.text("watchedFolder"), document.text("officeFolder"));
     }
 
     private static Map<Unit, Unit> readUnits(Branch document) {
@@ -85,22 +87,23 @@ public record Preferences(String person, Locale locale, UnitSystem units, Map<Un
                 .with("gloves", Node.flag(gloves)).with("dpi", Node.number(BigDecimal.valueOf(dpi)))
                 .with("text", text.code());
         Branch exporting = exportFolder.map(folder -> document.with("exportFolder", folder)).orElse(document);
-        return watchedFolder.map(folder -> exporting.with("watchedFolder", folder)).orElse(exporting);
+        Branch watching = watchedFolder.map(folder -> exporting.with("watchedFolder", folder)).orElse(exporting);
+        return officeFolder.map(folder -> watching.with("officeFolder", folder)).orElse(watching);
     }
 
     public Preferences withPerson(String name) {
         return new Preferences(name, locale, units, chosenUnits, lighting, gloves, dpi, text, exportFolder,
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     public Preferences withLocale(Locale other) {
         return new Preferences(person, other, units, chosenUnits, lighting, gloves, dpi, text, exportFolder,
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     public Preferences withUnits(UnitSystem other) {
         return new Preferences(person, locale, other, chosenUnits, lighting, gloves, dpi, text, exportFolder,
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     /** Asks and shows in another unit what the unit system has its own one for. */
@@ -112,12 +115,12 @@ public record Preferences(String person, Locale locale, UnitSystem units, Map<Un
             chosen.put(usual, liked);
         }
         return new Preferences(person, locale, units, chosen, lighting, gloves, dpi, text, exportFolder,
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     public Preferences withLighting(Lighting other) {
         return new Preferences(person, locale, units, chosenUnits, other, gloves, dpi, text, exportFolder,
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     /** Sets the screen for night or day, whatever the clock says. */
@@ -132,25 +135,31 @@ public record Preferences(String person, Locale locale, UnitSystem units, Map<Un
 
     public Preferences withGloves(boolean worn) {
         return new Preferences(person, locale, units, chosenUnits, lighting, worn, dpi, text, exportFolder,
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     public Preferences withDpi(double density) {
         return new Preferences(person, locale, units, chosenUnits, lighting, gloves, density, text, exportFolder,
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     public Preferences withText(TextSize size) {
         return new Preferences(person, locale, units, chosenUnits, lighting, gloves, dpi, size, exportFolder,
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     public Preferences withExportFolder(String folder) {
         return new Preferences(person, locale, units, chosenUnits, lighting, gloves, dpi, text, Optional.of(folder),
-                watchedFolder);
+                watchedFolder, officeFolder);
     }
 
     public Preferences withWatchedFolder(Optional<String> folder) {
-        return new Preferences(person, locale, units, chosenUnits, lighting, gloves, dpi, text, exportFolder, folder);
+        return new Preferences(person, locale, units, chosenUnits, lighting, gloves, dpi, text, exportFolder, folder,
+                officeFolder);
+    }
+
+    public Preferences withOfficeFolder(String folder) {
+        return new Preferences(person, locale, units, chosenUnits, lighting, gloves, dpi, text, exportFolder,
+                watchedFolder, Optional.of(folder));
     }
 }

@@ -8,10 +8,10 @@ import javafx.stage.FileChooser;
 import javafx.stage.Stage;
 
 /** Asks by the dialogs of the machine, over one window. */
-final class StageChoice implements FolderChoice {
+public final class StageChoice implements FolderChoice {
     private final Stage stage;
 
-    StageChoice(Stage stage) {
+    public StageChoice(Stage stage) {
         this.stage = stage;
     }
 

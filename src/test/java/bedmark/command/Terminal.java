@@ -22,12 +22,17 @@ public final class Terminal {
 
     /** Runs a command where there is no display. */
     public static Result run(String... arguments) {
+        return run((file, kind) -> false, arguments);
+    }
+
+    /** Runs a command where files are shown in a way of the test's. */
+    static Result run(Surroundings.Showing showing, String... arguments) {
         StringWriter out = new StringWriter();
         StringWriter err = new StringWriter();
         int code = BedmarkCommand.run(new Surroundings(new PrintWriter(out), new PrintWriter(err),
                 Optional.of(Path.of("").toAbsolutePath()),
                 Clock.fixed(Instant.parse("2026-03-12T09:42:07Z"), ZoneOffset.UTC), new Words(Locale.ENGLISH),
-                (store, samples, load) -> false), arguments);
+                (store, samples, load) -> false, showing), arguments);
         return new Result(code, out.toString(), err.toString());
     }
 }

@@ -57,7 +57,7 @@ class OfficeStoreTest {
             Map<String, Level> expected = new TreeMap<>();
             new Assessor(bundle.register()).assess(bundle.surveys()).stream()
                     .filter(one -> one.survey().inspectionStatus() == InspectionStatus.INSPECTED)
-                    .forEach(one -> expected.put(one.survey().transfer(), Judge.level(one.assessment())));
+                    .forEach(one -> expected.put(one.survey().transfer(), one.assessment().worstLevel()));
             Map<String, Level> ranked = store.rank().stream().filter(zone -> zone.level().isPresent()).collect(
                     Collectors.toMap(zone -> zone.zone().transfer(), zone -> zone.level().get(), (one, two) -> one,
                             TreeMap::new));

@@ -57,6 +57,15 @@ public final class Glass {
         }
     }
 
+    /** Shows a scene at the corner of the glass: elsewhere part of it may lie where no click reaches it. */
+    public static void show(Stage stage, Scene scene) {
+        stage.setScene(scene);
+        stage.sizeToScene();
+        stage.setX(0);
+        stage.setY(0);
+        stage.show();
+    }
+
     /** A dressed and laid out scene on a stage. */
     public static Scene show(Parent root, Light light, Density density, double width, double height) {
         Stage stage = new Stage();

@@ -24,7 +24,8 @@ class PreferencesTest {
     void everySettingComesBackAsItWas() {
         Preferences all = new Preferences("A. Vale", Locale.forLanguageTag("es"), UnitSystem.US,
                 Map.of(Unit.INCH, Unit.MILLIMETRE, Unit.HORSEPOWER, Unit.KILOWATT), Lighting.CLOCK, true, 224,
-                TextSize.LARGE, Optional.of("/media/stick"), Optional.of("/home/camera"));
+                TextSize.LARGE, Optional.of("/media/stick"), Optional.of("/home/camera"),
+                Optional.of("/srv/office"));
         assertEquals(all, Preferences.of(all.document()));
         assertEquals(Preferences.standard(), Preferences.of(Branch.EMPTY));
     }

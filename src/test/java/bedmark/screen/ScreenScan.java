@@ -11,12 +11,13 @@ import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
 import javafx.scene.control.ButtonBase;
+import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Control;
 import javafx.scene.control.Label;
 import javafx.scene.control.Labeled;
+import javafx.scene.control.ListView;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextInputControl;
-import javafx.scene.control.ContentDisplay;
 import javafx.scene.layout.BackgroundFill;
 import javafx.scene.layout.Region;
 import javafx.scene.paint.Color;
@@ -139,7 +140,7 @@ final class ScreenScan {
         }
         Bounds bounds = node.localToScene(node.getLayoutBounds());
         boolean aside = bounds.getMinX() < -SLACK || bounds.getMaxX() > width + SLACK;
-        boolean below = !within(node, ScrollPane.class) && !inFoot(node)
+        boolean below = !within(node, ScrollPane.class) && !within(node, ListView.class) && !inFoot(node)
                 && (bounds.getMinY() < -SLACK || bounds.getMaxY() > Math.min(foot, height) + SLACK);
         if (aside || below) {
             findings.add("out of sight: " + name(node) + " at " + bounds);

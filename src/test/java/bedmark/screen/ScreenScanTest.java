@@ -38,7 +38,7 @@ class ScreenScanTest {
     private TabletApp app;
 
     /** How a screen is looked at; the glass is always 10.1 inches, with as many pixels as its density makes. */
-    private record Look(Locale language, boolean night, boolean gloves, double dpi, TextSize text) {
+    record Look(Locale language, boolean night, boolean gloves, double dpi, TextSize text) {
         double scale() {
             return dpi / Density.DEFAULT_DPI;
         }
@@ -54,7 +54,7 @@ class ScreenScanTest {
             new Look(SPANISH, false, false, 149, TextSize.LARGE),
             new Look(Locale.ENGLISH, true, true, 149, TextSize.LARGE));
 
-    private static final List<Look> LOOKS = Boolean.getBoolean("bedmark.scan.full") ? all() : PAIRS;
+    static final List<Look> LOOKS = Boolean.getBoolean("bedmark.scan.full") ? all() : PAIRS;
 
     private static List<Look> all() {
         List<Look> looks = new ArrayList<>();

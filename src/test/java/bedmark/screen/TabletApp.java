@@ -44,9 +44,7 @@ public final class TabletApp implements AutoCloseable {
             workplace = new Workplace(store, clock, Platform::runLater, (title, begin) -> Optional.of(folder()),
                     samples);
             shell = new Shell(workplace, width, height);
-            stage.setScene(shell.scene());
-            stage.sizeToScene();
-            stage.show();
+            Glass.show(stage, shell.scene());
             return null;
         });
         settle();

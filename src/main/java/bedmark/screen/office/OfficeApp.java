@@ -1,13 +1,11 @@
 package bedmark.screen.office;
 
 import bedmark.office.OfficeStore;
-import java.io.File;
-import java.nio.file.Path;
+import bedmark.screen.StageChoice;
 import java.time.Clock;
 import java.util.Optional;
 import javafx.application.Application;
 import javafx.application.Platform;
-import javafx.stage.DirectoryChooser;
 import javafx.stage.Stage;
 
 /** The window of the office. */
@@ -42,19 +40,23 @@ public final class OfficeApp extends Application {
     @Override
     public void start(Stage stage) {
         Launch given = launch.orElseThrow();
-        OfficeDesk desk = new OfficeDesk(given.store(), given.clock(), Platform::runLater,
-                (title, begin) -> choose(stage, title, begin));
-        shell = new OfficeShell(desk, WIDTH, HEIGHT);
+        shell = show(stage, new OfficeDesk(given.store(), given.clock(), Platform::runLater, new StageChoice(stage)));
         stage.setTitle("Bedmark");
-        stage.setScene(shell.scene());
         stage.show();
     }
 
-    private static Optional<Path> choose(Stage stage, String title, Optional<Path> begin) {
-        DirectoryChooser chooser = new DirectoryChooser();
-        chooser.setTitle(title);
-        begin.map(Path::toFile).filter(File::isDirectory).ifPresent(chooser::setInitialDirectory);
-        return Optional.ofNullable(chooser.showDialog(stage)).map(File::toPath);
+    /**
+     * Shows an office in a window that is there.
+     *
+     * @param desk closed together with the shell
+     * @return what the window must close when it is closed itself
+     */
+    public static OfficeShell show(Stage stage, OfficeDesk desk) {
+        boolean sized = stage.getScene() != null;
+        OfficeShell shell = new OfficeShell(desk, sized ? stage.getScene().getWidth() : WIDTH,
+                sized ? stage.getScene().getHeight() : HEIGHT);
+        stage.setScene(shell.scene());
+        return shell;
     }
 
     @Override

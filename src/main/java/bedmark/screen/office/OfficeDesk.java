@@ -13,6 +13,7 @@ import bedmark.words.Words;
 import java.time.Clock;
 import java.util.List;
 import java.util.Optional;
+import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.Executor;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -41,6 +42,7 @@ public final class OfficeDesk implements AutoCloseable {
     private final ReadOnlyObjectWrapper<List<Defect>> found;
     private final ReadOnlyIntegerWrapper changes = new ReadOnlyIntegerWrapper();
     private final AtomicBoolean stop = new AtomicBoolean();
+    private final AtomicBoolean closed = new AtomicBoolean();
     private final ExecutorService work = Executors.newSingleThreadExecutor(run -> {
         Thread thread = new Thread(run, "office-work");
         thread.setDaemon(true);
@@ -139,9 +141,15 @@ public final class OfficeDesk implements AutoCloseable {
     }
 
     private <T> void run(Function<Progress, T> task, Consumer<T> then, boolean changing) {
+        if (closed.get()) {
+            return;
+        }
         progress.set(0);
         stop.set(false);
         work.execute(() -> {
+            if (closed.get()) {
+                return;
+            }
             try {
                 T result = task.apply(new Telling());
                 screen.execute(() -> {
@@ -186,10 +194,15 @@ public final class OfficeDesk implements AutoCloseable {
         }
     }
 
+    /** Stops the work under way, drops what waits for it, and closes the store once nobody asks it any more. */
     @Override
     public void close() {
+        if (closed.getAndSet(true)) {
+            return;
+        }
         stop.set(true);
+        CompletableFuture<Void> done = CompletableFuture.runAsync(store::close, work);
         work.shutdown();
-        store.close();
+        done.join();
     }
 }

@@ -31,7 +31,8 @@ public final class ReceiveModel {
     });
     private volatile Optional<PackFolder> folder = Optional.empty();
 
-    ReceiveModel(OfficeDesk desk) {
+    /** A model at a desk; packs that came before it are not told of. */
+    public ReceiveModel(OfficeDesk desk) {
         this.desk = desk;
         watch.scheduleWithFixedDelay(this::look, LOOK_EVERY_SECONDS, LOOK_EVERY_SECONDS, TimeUnit.SECONDS);
     }
@@ -101,7 +102,8 @@ public final class ReceiveModel {
         came.forEach(one -> received.add(0, one));
     }
 
-    void close() {
+    /** Watches no folder any more. */
+    public void close() {
         watch.shutdownNow();
     }
 }

@@ -15,7 +15,7 @@ import javafx.scene.Scene;
 public final class Theme {
     /** The sheets that hold the look, in their order; lengths in them are those of the glass. */
     static final List<String> SHEETS = List.of("theme.css", "parts.css", "controls.css", "screens.css", "walk.css",
-            "office.css");
+            "arrival.css", "office.css");
 
     private Theme() {
     }

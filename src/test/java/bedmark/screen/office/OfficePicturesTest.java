@@ -2,10 +2,15 @@ package bedmark.screen.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import bedmark.office.OfficeOptions;
+import bedmark.office.OfficeStore;
 import bedmark.office.Offices;
+import bedmark.office.RoundDesk;
 import bedmark.screen.Glass;
+import bedmark.screen.arrival.ArrivalWindow;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -20,6 +25,8 @@ class OfficePicturesTest {
     private static final Path PICTURES = Path.of(System.getProperty("bedmark.screens", FOLDER.toString()));
     private static final List<String> FEW = List.of("landscape-day-en", "portrait-night-es");
     private static final Map<String, String> TOLD = new LinkedHashMap<>();
+    private static final List<String> ARRIVALS = List.of("pack", "pack-untrusted", "pack-received", "pack-refused",
+            "next-round");
 
     static {
         TOLD.put("worst", "All loading zones of all plants, worst first.");
@@ -28,6 +35,11 @@ class OfficePicturesTest {
         TOLD.put("energy", "What the skirts take in a year, and what the best remedies save.");
         TOLD.put("register", "The register as tables, edited in place.");
         TOLD.put("report", "The report, as a file of one's choice.");
+        TOLD.put("pack", "A pack that was opened by itself, before the office has it.");
+        TOLD.put("pack-untrusted", "The office does not know the tablet yet: its fingerprint is compared once.");
+        TOLD.put("pack-received", "The pack is in, and the office can be opened.");
+        TOLD.put("pack-refused", "A pack that was changed after it was signed.");
+        TOLD.put("next-round", "A round file that was opened by itself, and where it belongs.");
     }
 
     @TempDir
@@ -49,15 +61,54 @@ class OfficePicturesTest {
                 window.click("receive-folder");
                 for (String look : List.of("day-en", "day-es", "night-en", "night-es")) {
                     for (String room : TOLD.keySet()) {
-                        if (looks(room).contains(shape + "-" + look)) {
+                        if (!ARRIVALS.contains(room) && looks(room).contains(shape + "-" + look)) {
                             take(window, room, look, shape + "-" + look);
                         }
                     }
                 }
             }
+            arrivals(packs, size, FEW.stream().filter(look -> look.startsWith(shape)).findFirst().orElseThrow());
         }
         assertEquals(Files.readString(FOLDER.resolve("office.md")), page(),
                 "src/site/screens/office.md names other pictures than are taken");
+    }
+
+    /** What a person sees who opens a file by itself. */
+    private void arrivals(Path packs, double[] size, String look) throws Exception {
+        Path home = Files.createDirectories(folder.resolve("home-" + look));
+        Path office = Files.createDirectories(home.resolve("office"));
+        try (ArrivalWindow window = new ArrivalWindow(packs.resolve("round-under-way.zip"), home, size[0], size[1])) {
+            window.chooses(office);
+            picture(window, "pack", look);
+            window.click("receive");
+            picture(window, "pack-untrusted", look);
+            window.click("trust");
+            picture(window, "pack-received", look);
+        }
+        Path round = home.resolve("ostermere-2026-10.round.json");
+        try (OfficeStore store = OfficeStore.open(office, OfficeOptions.of(Offices.NOW))) {
+            new RoundDesk(store).send("ostermere", List.of(), round, OffsetDateTime.now(Offices.NOW), "Ida Marsh");
+        }
+        byte[] bytes = Files.readAllBytes(packs.resolve("round-2026-03.zip"));
+        bytes[bytes.length / 2] ^= 1;
+        Path changed = Files.write(home.resolve("changed.zip"), bytes);
+        for (Map.Entry<Path, String> file : Map.of(changed, "pack-refused", round, "next-round").entrySet()) {
+            try (ArrivalWindow window = new ArrivalWindow(file.getKey(), home, size[0], size[1])) {
+                picture(window, file.getValue(), look);
+            }
+        }
+    }
+
+    private static void picture(ArrivalWindow window, String name, String look) throws Exception {
+        Glass.on(() -> {
+            window.prefer(look.contains("night"), Locale.forLanguageTag(look.substring(look.length() - 2)));
+            return null;
+        });
+        window.settle();
+        Glass.on(() -> {
+            Glass.write(PICTURES.resolve("office-" + name + "-" + look + ".png"), window.scene());
+            return null;
+        });
     }
 
     private static List<String> looks(String room) {

@@ -38,9 +38,7 @@ final class OfficeWindow implements AutoCloseable {
         Glass.on(() -> {
             desk.preferencesProperty().set(desk.preferences().withPerson("Ida Marsh"));
             shell = new OfficeShell(desk, width, height);
-            stage.setScene(shell.scene());
-            stage.sizeToScene();
-            stage.show();
+            Glass.show(stage, shell.scene());
             return null;
         });
         settle();

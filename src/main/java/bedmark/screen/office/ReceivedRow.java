@@ -1,0 +1,71 @@
+package bedmark.screen.office;
+
+import bedmark.office.Received;
+import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.Plate;
+import bedmark.screen.part.Texts;
+import bedmark.screen.part.Weight;
+import bedmark.survey.merge.Clash;
+import bedmark.wording.Wording;
+import java.util.function.Consumer;
+import javafx.geometry.Pos;
+import javafx.scene.control.Label;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.VBox;
+
+/** What came of one pack: whether it is in, in words; of an unknown tablet the question whether to trust it. */
+public final class ReceivedRow extends HBox {
+    private final Wording wording;
+
+    /** @param trust told that the person compared the fingerprint of a pack's device */
+    public ReceivedRow(Wording wording, Received received, Consumer<Received.Turned> trust) {
+        this.wording = wording;
+        getStyleClass().add("received-row");
+        setAlignment(Pos.CENTER_LEFT);
+        VBox words = new VBox();
+        words.setMinWidth(0);
+        HBox.setHgrow(words, Priority.ALWAYS);
+        Label file = Texts.wrapped(received.file().getFileName().toString());
+        file.getStyleClass().add("zone-name");
+        words.getChildren().add(file);
+        getChildren().addAll(plate(received), words);
+        if (received instanceof Received.Taken taken) {
+            taken(taken, words);
+        } else if (received instanceof Received.AlreadyHere here) {
+            words.getChildren().add(Texts.wrapped(wording.text("office.receive.known", here.device())));
+        } else if (received instanceof Received.Turned turned) {
+            words.getChildren().add(Texts.wrapped(wording.sentence(turned.why())));
+            if (turned.untrusted()) {
+                ActionButton button = new ActionButton(Weight.PRIMARY, wording.text("office.receive.trust"), () ->
+                        trust.accept(turned));
+                button.setId("trust");
+                getChildren().add(button);
+            }
+        }
+    }
+
+    private void taken(Received.Taken taken, VBox words) {
+        words.getChildren().add(Texts.wrapped(wording.text("office.receive.from", taken.device(), taken.fresh(),
+                taken.known())));
+        taken.clashes().forEach(clash -> words.getChildren().add(Texts.trouble(clash(clash))));
+        if (taken.clock() > 0) {
+            words.getChildren().add(Texts.trouble(wording.text("office.receive.clock", taken.device(),
+                    Math.max(1, taken.clock() / 60))));
+        }
+    }
+
+    private Plate plate(Received received) {
+        if (received instanceof Received.Turned) {
+            return new Plate(Plate.Tone.OVER, wording.text("office.receive.refused"));
+        }
+        return received instanceof Received.Taken
+                ? new Plate(Plate.Tone.PLAIN, wording.text("office.receive.received"))
+                : new Plate(Plate.Tone.FAINT, wording.text("office.receive.before"));
+    }
+
+    private String clash(Clash clash) {
+        return wording.text("office.clash." + clash.kind().code(), clash.sides().get(0).zone().transfer(),
+                clash.sides().get(0).id(), clash.sides().get(0).revision());
+    }
+}

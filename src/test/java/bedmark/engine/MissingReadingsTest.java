@@ -209,6 +209,8 @@ class MissingReadingsTest {
     void theSitesOwnSealRateIsSaid() {
         Settings own = Settings.standard().with(new SealRates(50, Map.of()));
         assertTrue(Engine.assess(ZONE, own).assumptions().contains(Assumption.of("seal-rate-site", "50.0")));
+        assertTrue(Engine.assess(ZONE.withSeals(List.of()), own).assumptions().stream()
+                .noneMatch(one -> one.code().startsWith("seal-rate")), "but not of seals that nobody looked at");
         Settings worn = Settings.standard().with(
                 Settings.standard().sealRates().with(SealType.VERTICAL, SealCondition.SOUND, 1.5));
         assertTrue(Engine.assess(ZONE, worn).assumptions().contains(

@@ -74,6 +74,17 @@ class PropagationTest {
     }
 
     @Test
+    void ofReadingsThatBringAsMuchTheFirstOneLeads() {
+        assertEquals("/readings/x", tape.traced(x.plus(y), "/").leading().orElseThrow());
+        assertEquals("/readings/x", tape.traced(y.minus(x), "/").leading().orElseThrow());
+    }
+
+    @Test
+    void aVarianceThatADoubleCannotHoldIsSharedByNobody() {
+        assertEquals(List.of(), tape.shares(x.times(1e-200)));
+    }
+
+    @Test
     void aReadingThatCameAfterAResultHasNoPartInIt() {
         Uncertain sum = x.plus(y);
         for (int i = 0; i < 60; i++) {

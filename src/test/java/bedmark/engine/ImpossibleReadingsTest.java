@@ -109,6 +109,10 @@ class ImpossibleReadingsTest {
                 () -> check(seals(5.9)));
         assertEquals(List.of("left", "5.9", "6.0"), refusal.arguments());
         refused("seal-lengths-disagree", "/readings/seals", () -> check(seals(6.1)));
+        ImpossibleReading right = refused("seal-lengths-disagree", "/readings/seals", () -> check(seals(6)
+                .withSeal(Side.RIGHT, SealType.NONE, SealCondition.SOUND, 2, 0)
+                .withSeal(Side.RIGHT, SealType.NONE, SealCondition.SOUND, 3, 0)));
+        assertEquals(List.of("right", "5.0", "6.0"), right.arguments());
         assertDoesNotThrow(() -> check(seals(6.06)));
         assertDoesNotThrow(() -> check(seals(5.94)));
         assertDoesNotThrow(() -> check(seals(3).without(Datum.ZONE_LENGTH)), "nothing to compare with yet");

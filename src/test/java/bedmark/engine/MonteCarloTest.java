@@ -100,6 +100,7 @@ class MonteCarloTest {
         assertEquals(first.probabilityOverloaded(), finding(zones.get(2), Rule.SKIRTS_OVER_BUDGET)
                 .probabilityOverloaded());
         assertTrue(finding(zones.get(1), Rule.SKIRTS_OVER_BUDGET).drawn());
+        zones.forEach(zone -> assertTrue(atDesign(zone, Rule.SKIRTS_OVER_BUDGET).drawn(), "at design feed too"));
     }
 
     /** Of exact zones nothing is drawn but where the methods stand: evenly over their range, for all zones alike. */

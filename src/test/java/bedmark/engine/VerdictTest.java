@@ -225,6 +225,9 @@ class VerdictTest {
         assertEquals(Optional.of(Component.SEAL), leading(HEALTHY.with(Datum.FEED_VELOCITY, 2, 0)));
         assertEquals(Optional.of(Component.LOADING), leading(HEALTHY.with(Datum.FEED_VELOCITY, -2, 0)));
         assertEquals(Optional.of(Component.BED), leading(depth(0.39).with(Datum.FEED_VELOCITY, 2, 0)));
+        assertEquals(Optional.of(Component.BED), leading(depth(0).with(Datum.FEED_VELOCITY, 2, 0)
+                .withSeals(List.of()).withSeal(Side.LEFT, SealType.NONE, SealCondition.SOUND, 6, 0)
+                .withSeal(Side.RIGHT, SealType.NONE, SealCondition.SOUND, 6, 0)), "where nothing pulls at all");
         assertEquals(Optional.empty(), leading(LoadingZone.UNKNOWN));
     }
 

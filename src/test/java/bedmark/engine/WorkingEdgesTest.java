@@ -126,6 +126,27 @@ class WorkingEdgesTest {
         assertTrue(level.value() < 0);
     }
 
+    /** Under the board line a bed lies on the wings, then on the centre roll, then nowhere. */
+    @Test
+    void aFreeboardBeyondTheBoardIsShownByWhereItsEdgeLies() {
+        LoadingZone bare = ZONE.withStations(List.of());
+        double trough = section(ZONE).troughDepth().value();
+        double crown = 0.45 * Math.tan(Math.toRadians(20)) / 4;
+        assertTrue(level(bare.withStation(3, 0.4 + trough - 1e-9, DepthMethod.FROM_BOARD_TOP, 0)).contains("s′1"));
+        Step onCentre = levelStep(bare.withStation(3, 0.4 + trough + 1e-9, DepthMethod.FROM_BOARD_TOP, 0));
+        assertEquals(Section.LEVEL_ON_CENTRE_OF_DROP.withSigns(Map.of("f", "f1")).expression(),
+                onCentre.formula().expression());
+        assertTrue(onCentre.symbols().stream().anyMatch(symbol -> symbol.sign().equals("d")
+                && symbol.value() == trough));
+        assertTrue(level(bare.withStation(3, 0.4 + trough + crown - 1e-9, DepthMethod.FROM_BOARD_TOP, 0))
+                .contains("− d)/tan θ"));
+        assertEquals("−A0/b1", level(bare.withStation(3, 0.4 + trough + crown + 1e-9, DepthMethod.FROM_BOARD_TOP, 0)));
+    }
+
+    private static Section section(LoadingZone zone) {
+        return new ZoneFacts(Sources.uncertain(Zones.exact(zone), Zones.exactSettings())).section().get();
+    }
+
     private static String level(LoadingZone zone) {
         return levelStep(zone).formula().expression();
     }
@@ -139,8 +160,7 @@ class WorkingEdgesTest {
     @Test
     void aDepthAtTheCentreIsShownByWhereItsEdgeLies() {
         LoadingZone bare = ZONE.withStations(List.of());
-        Section section = new ZoneFacts(Sources.uncertain(Zones.exact(ZONE), Zones.exactSettings())).section().get();
-        double touching = section.troughDepth().value() + section.crownRise().value();
+        double touching = section(ZONE).troughDepth().value() + section(ZONE).crownRise().value();
         double leavingWings = 0.45 * Math.tan(Math.toRadians(20)) / 4;
         assertEquals("D1 − d − r", level(bare.withStation(3, touching + 1e-9, DepthMethod.AT_CENTRE, 0)));
         assertEquals(Section.LEVEL_ON_WINGS.withSigns(Map.of("h", "h1", "s′", "s′1")).expression(),
@@ -148,6 +168,9 @@ class WorkingEdgesTest {
         assertTrue(level(bare.withStation(3, leavingWings + 1e-9, DepthMethod.AT_CENTRE, 0)).contains("s′1"));
         assertTrue(level(bare.withStation(3, leavingWings - 1e-9, DepthMethod.AT_CENTRE, 0)).contains("4 · D1/tan θ"));
         assertEquals("−A0/b1", level(bare.withStation(3, 0, DepthMethod.AT_CENTRE, 0)));
+        LoadingZone flat = bare.with(Datum.TROUGH_ANGLE, 0, 0);
+        assertEquals("D1 − d − r", level(flat.withStation(3, section(flat).crownRise().value(), DepthMethod.AT_CENTRE,
+                0)), "a crown that just reaches the boards");
     }
 
     /** The trough and the rise of the crown are written once, however many stations need them. */

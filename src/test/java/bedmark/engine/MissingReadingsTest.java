@@ -158,6 +158,18 @@ class MissingReadingsTest {
         assertEquals(List.of("/material/angleOfRepose"), chosen.missingRequired());
     }
 
+    /** By ISO 5048 a zone has drag and power before anybody read a depth: there is no bed to change yet. */
+    @Test
+    void aFlowWithoutABedHasItsDragAndNoRemedy() {
+        LoadingZone bare = ZONE.withStations(List.of());
+        Assessment assessment = Engine.assess(bare, Settings.standard().with(DragMethod.ISO_5048));
+        assertEquals(assessment.methods().get(DragMethod.ISO_5048),
+                assessment.get(Result.MATERIAL_DRAG).orElseThrow());
+        assertTrue(assessment.get(Result.SKIRT_POWER).isPresent());
+        assertEquals(List.of(), assessment.remedies());
+        assertEquals(List.of("/readings/bedDepths"), assessment.missingRequired());
+    }
+
     @Test
     void aBeltThatStandsHasNoRatios() {
         Assessment assessment = Engine.assess(ZONE.with(Datum.BELT_SPEED, 0, 0), Settings.standard());

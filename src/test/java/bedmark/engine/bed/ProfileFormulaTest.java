@@ -47,6 +47,14 @@ class ProfileFormulaTest {
     }
 
     @Test
+    void aStretchThatTouchesNowhereIsLeftOut() {
+        assertSums("(x3 − x2) · h3³/(3 · (h3 − h2)) + (L − x3) · h3²",
+                "(x3 − x2) · h3²/(2 · (h3 − h2)) + (L − x3) · h3",
+                "x1 · h1 + (x2 − x1) · (h1 + h2)/2 + (x3 − x2) · (h2 + h3)/2 + (L − x3) · h3",
+                of(6, List.of(1.0, 3.0, 5.0), -0.1, -0.2, 0.3));
+    }
+
+    @Test
     void aBedThatTouchesNowhereHasNoIntegral() {
         assertSums("0", "0", "x1 · h1 + (x2 − x1) · (h1 + h2)/2 + (L − x2) · h2",
                 of(6, List.of(1.0, 3.0), -0.2, -0.1));

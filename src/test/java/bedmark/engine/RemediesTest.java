@@ -210,6 +210,10 @@ class RemediesTest {
         Settings byBoard = Settings.standard().with(Settings.standard().limits().without(Rule.BED_OVER_DESIGN));
         double spacing = widened(DEEP.with(Datum.READ_SPACING, 0.795, 0), byBoard);
         assertEquals(carried(0.795) + 0.36 * 0.795, carried(spacing) + 0.85 * 0.4 * spacing, 1e-9);
+        LoadingZone level = ZONE.with(Datum.READ_SPACING, 0.795, 0).with(Datum.DESIGN_BED_DEPTH, 0.3, 0)
+                .withStations(List.of()).withStation(1, 0.339, DepthMethod.AT_BOARD, 0);
+        double byDesign = widened(level, Settings.standard());
+        assertEquals(carried(0.795) + 0.339 * 0.795, carried(byDesign) + 1.1 * 0.3 * byDesign, 1e-9);
     }
 
     /** Where the width of the belt allows more, its free edge of 0.055 B + 22.86 mm decides, along the belt. */
@@ -220,6 +224,11 @@ class RemediesTest {
         double edge = 0.055 * 1.2 + 0.02286;
         assertEquals(0.45 + 2 * (0.375 - edge) * Math.cos(Math.toRadians(35)), widened(ZONE, wide), 1e-12);
         assertEquals(1.2 - 2 * edge, widened(ZONE.with(Datum.TROUGH_ANGLE, 0, 0), wide), 1e-12);
+        Limit none = Limit.ofSite(OptionalDouble.empty(), OptionalDouble.empty());
+        Settings unlimited = Settings.standard().with(Settings.standard().limits().with(Rule.BOARDS_TOO_WIDE, none)
+                .with(Rule.EDGE_TOO_SMALL, none));
+        assertEquals(0.45 + 0.75 * Math.cos(Math.toRadians(35)), widened(ZONE, unlimited), 1e-12,
+                "without limits as far as the wing rolls reach");
     }
 
     private static double widened(LoadingZone zone, Settings settings) {

@@ -91,6 +91,19 @@ class MethodSpreadTest {
                 .with(Datum.SITE_FACTOR, 0.1, 0.01), Settings.standard()).spread(), "no density, no pressure");
     }
 
+    /** Two factors of the same size, and nothing else that tells a drag. */
+    @Test
+    void methodsThatAgreeDoNotSpread() {
+        LoadingZone agreed = ZONE.with(Datum.SITE_FACTOR, 0.0754, 0).without(Datum.ANGLE_OF_REPOSE)
+                .without(Datum.BELT_SPEED);
+        Assessment assessment = Engine.assess(agreed, Settings.standard());
+        assertEquals(assessment.methods().get(DragMethod.TABULATED).value(),
+                assessment.methods().get(DragMethod.SITE).value());
+        assertEquals(Optional.empty(), assessment.spread());
+        assertEquals(Optional.empty(), Engine.assess(ZONE.with(Datum.THROUGHPUT, 0, 0), Settings.standard()).spread(),
+                "of nothing there is no ratio");
+    }
+
     @Test
     void theSpreadCountsAsARectangleBetweenTheMethodsOfOneDepth() {
         Assessment assessment = Engine.assess(ZONE, Settings.standard());

@@ -40,15 +40,6 @@ class AssumptionsTest {
         assertTrue(isSaid("bed-below-boards", bare.withStation(3, 0.401, DepthMethod.FROM_BOARD_TOP, 0)));
     }
 
-    /** What lies beyond today's power is a lower bound only where the drive's rule was judged, and at more feed. */
-    @Test
-    void theDriveAtDesignIsALowerBoundWhereItIsJudgedAtAll() {
-        LoadingZone more = ZONE.with(Datum.DESIGN_THROUGHPUT, 300, 0);
-        assertTrue(isSaid("drive-lower-bound-at-design", more));
-        assertFalse(isSaid("drive-lower-bound-at-design", more.without(Datum.RUNNING_POWER)));
-        assertFalse(isSaid("drive-lower-bound-at-design", ZONE));
-    }
-
     @Test
     void whatTheSettlingLengthDoesNotUseIsNotAssumed() {
         LoadingZone unknown = ZONE.without(Datum.IMPACT_LENGTH);

@@ -1,6 +1,7 @@
 package bedmark.engine;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.verdict.Finding;
@@ -83,6 +84,10 @@ class ConveyorTest {
         double other = both.get(1).get(Result.DRIVE_SHARE).orElseThrow().value();
         assertEquals(alone + other, skirtsAtDesign(both.get(0)), 1e-12);
         assertEquals(List.of(), both.get(1).findingsAtDesign());
+        Assumption asToday = Assumption.of("conveyor-sum-at-todays-feed", "1");
+        assertTrue(both.get(0).assumptions().contains(asToday));
+        Assessment lacking = Engine.assessConveyor(List.of(half, unweighed), 2, Settings.standard()).zones().get(0);
+        assertFalse(lacking.assumptions().contains(asToday), "of a sum that nothing is judged by");
     }
 
     private static double spread(LoadingZone zone, int zones) {

@@ -198,6 +198,12 @@ class RemediesTest {
         assertEquals(1.5, slower.change().orElseThrow(), 1e-12);
         assertEquals(((carried() + 0.7 * 0.12) * 4 / 3 - carried()) / 0.7, slower.meanDepth(), 1e-12);
         assertFalse(slower.ranked());
+        Settings iso = slow.with(DragMethod.ISO_5048);
+        double drag = Engine.assess(ZONE.with(Datum.BELT_SPEED, 1.5, 0), iso).get(Result.SKIRT_DRAG).orElseThrow()
+                .value();
+        assertEquals(drag, Engine.assess(ZONE, iso).remedies().stream()
+                .filter(remedy -> remedy.code().equals("slower-belt")).findFirst().orElseThrow().skirtDrag(), 1e-9,
+                "the feed comes to another speed in another length");
         Settings never = slow.with(slow.limits().with(Rule.BELT_TOO_FAST, Limit.ofSite(OptionalDouble.of(0),
                 OptionalDouble.empty())));
         assertTrue(Engine.assess(ZONE, never).remedies().stream()

@@ -26,6 +26,13 @@ class ConveyorTest {
     }
 
     @Test
+    void theSumIsLedByAReadingOfTheZonesOwn() {
+        LoadingZone coarse = Zones.exact(ZONE).with(Datum.BELT_SPEED, 2, 0.2);
+        assertEquals(Optional.of("/readings/beltSpeed"), skirts(Engine.assess(coarse, Settings.standard()))
+                .orElseThrow().leadingReading());
+    }
+
+    @Test
     void zonesOfAConveyorAddUp() {
         double one = skirts(Engine.assess(ZONE, Settings.standard())).orElseThrow().observed();
         List<Assessment> three = Engine.assessConveyor(Collections.nCopies(3, ZONE), 0, Settings.standard()).zones();
@@ -58,6 +65,7 @@ class ConveyorTest {
     void aSumThatLacksZonesShowsOnlyThatTheLimitIsPassed() {
         Assessment alone = Engine.assessConveyor(List.of(ZONE), 2, Settings.standard()).zones().get(0);
         assertEquals(Optional.empty(), skirts(alone));
+        assertEquals(List.of(), alone.refused(), "a zone that is not surveyed yet is no refusal");
         LoadingZone weak = ZONE.with(Datum.RATED_POWER, 5_000, 0);
         Assessment passed = Engine.assessConveyor(List.of(weak), 2, Settings.standard()).zones().get(0);
         assertEquals(Level.NEAR, skirts(passed).orElseThrow().level());

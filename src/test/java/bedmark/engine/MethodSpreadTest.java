@@ -59,6 +59,13 @@ class MethodSpreadTest {
         double accelerated = (4 - 0.25) / (2 * 9.80665 * (0.6 * Math.cos(0.05) - Math.sin(0.05)));
         double integral = mean * mean * (accelerated * (2 / 1.25) * (2 / 1.25) + 6 - accelerated);
         assertEquals(integral / (6 * 0.04), ratios.get(Cause.WHICH_DEPTH), 1e-9);
+        LoadingZone deep = zone.without(Datum.SKIRT_FRICTION_FACTOR).with(Datum.WALL_FRICTION, 1, 0)
+                .withStations(List.of()).withStation(3, 0.39, DepthMethod.AT_BOARD, 0);
+        MethodSpread other = Engine.assess(deep, Zones.exactSettings()).spread().orElseThrow();
+        assertEquals(DragMethod.ISO_5048, other.lowest());
+        assertEquals((1 - sine) / (1 + sine), ratios(other).get(Cause.LATERAL_PRESSURE), 1e-9);
+        assertEquals(1 / 0.6, ratios(other).get(Cause.WALL_FRICTION), 1e-12);
+        assertEquals(6 * 0.39 * 0.39 / integral, ratios(other).get(Cause.WHICH_DEPTH), 1e-9);
         MethodSpread depthsAlike = Engine.assess(zone.with(Datum.WALL_FRICTION, 1, 0).without(Datum.BELT_SPEED),
                 Zones.exactSettings()).spread().orElseThrow();
         assertEquals(List.of(Cause.LATERAL_PRESSURE), depthsAlike.reasons().stream().map(Reason::cause).toList());

@@ -7,16 +7,20 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.bed.DepthMethod;
+import bedmark.engine.drag.DragMethod;
 import bedmark.engine.uncertainty.Distribution;
 import bedmark.engine.uncertainty.ImpossibleReading;
+import bedmark.engine.uncertainty.Reading;
 import bedmark.engine.verdict.Chance;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Level;
+import bedmark.engine.verdict.Limit;
 import bedmark.engine.verdict.Rule;
 import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
 
@@ -126,6 +130,81 @@ class MonteCarloTest {
             assertEquals(0, one.chances().get(Rule.DRIVE_NEAR_RATING).standardDeviation(), 1e-12);
             assertEquals(0, one.results().get(Result.DRIVE_SHARE).standardDeviation(), 1e-12);
         }
+    }
+
+    /** Where the methods stand above the middle of their range, the power lies above what was computed. */
+    @Test
+    void theDisagreementMovesThePowerItsOwnWay() {
+        LoadingZone zone = Zones.exact(ZONE).with(Datum.DESIGN_THROUGHPUT, 400, 0);
+        Settings spread = Zones.exactSettings().with(Zones.exactSettings().conventions().withSpread(true));
+        Assessment assessment = Engine.assess(zone, spread);
+        double above = new Random(SEED).doubles(13).filter(even -> even > 0.5).count() / 13.0;
+        assertEquals(above, beyond(zone, spread, finding(assessment, Rule.SKIRTS_OVER_BUDGET)).chances()
+                .get(Rule.SKIRTS_OVER_BUDGET).near().orElseThrow());
+        for (Rule rule : List.of(Rule.SKIRTS_OVER_BUDGET, Rule.DRIVE_NEAR_RATING)) {
+            assertEquals(above, beyond(zone, spread, atDesign(assessment, rule)).chancesAtDesign().get(rule).near()
+                    .orElseThrow());
+        }
+    }
+
+    /** Draws against a limit of what was observed. */
+    private static MonteCarlo beyond(LoadingZone zone, Settings settings, Finding finding) {
+        Limit limit = Limit.ofSite(OptionalDouble.of(finding.observed()), OptionalDouble.empty());
+        return Engine.monteCarlo(List.of(zone), settings.with(settings.limits().with(finding.rule(), limit)), SEED,
+                13).get(0);
+    }
+
+    @Test
+    void everyMethodIsDrawnByItself() {
+        LoadingZone zone = Zones.exact(ZONE).with(Datum.SITE_FACTOR, 0.1, 0);
+        MonteCarlo drawn = Engine.monteCarlo(List.of(zone), Zones.exactSettings(), SEED, 3).get(0);
+        Engine.assess(zone, Zones.exactSettings()).methods().forEach((method, estimate) -> {
+            assertEquals(estimate.value(), drawn.methods().get(method).mean(), 1e-9);
+            assertEquals(0, drawn.methods().get(method).standardDeviation(), 1e-9);
+        });
+        assertEquals(DragMethod.values().length, drawn.methods().size());
+    }
+
+    /** On a belt just steep enough some drawings have an acceleration length and some have none. */
+    @Test
+    void aNumberThatOneTrialLacksHasNoDistribution() {
+        LoadingZone steep = ZONE.with(Datum.INCLINE, Math.atan(0.6), 0.05);
+        int fromTheSecondOn = 0;
+        for (int seed = 0; seed < 20; seed++) {
+            boolean first = isDrawn(steep, seed, 1);
+            boolean both = isDrawn(steep, seed, 2);
+            assertTrue(first || !both, "seed " + seed);
+            fromTheSecondOn += first ? 0 : 1;
+        }
+        assertTrue(fromTheSecondOn > 5 && fromTheSecondOn < 15, fromTheSecondOn + " first trials without");
+    }
+
+    private static boolean isDrawn(LoadingZone zone, long seed, int trials) {
+        return Engine.monteCarlo(List.of(zone), Settings.standard(), seed, trials).get(0).results()
+                .containsKey(Result.ACCELERATION_LENGTH);
+    }
+
+    /** What can hardly be drawn within its domain is taken as it stands rather than drawn for ever. */
+    @Test
+    void aReadingOutOfReachIsTakenAsItStands() {
+        Reading impossible = new Reading(Datum.DRIVE_EFFICIENCY.pointer(), 5, 0.001);
+        assertEquals(5, new Draw(new Random(SEED)).take(impossible).value());
+        assertEquals(0.5, new Draw(new Random(SEED)).take(Reading.exact("/x", 0.5)).value());
+    }
+
+    @Test
+    void whatMayBeDrawnIsSaidByThePlaceOfTheReading() {
+        assertEquals(Domain.EFFICIENCY, domain(Datum.DRIVE_EFFICIENCY.pointer()));
+        assertEquals(Domain.SLOPE, domain(Datum.INCLINE.pointer()));
+        assertEquals(Domain.NOT_NEGATIVE, domain("/readings/bedDepths/0/depth"));
+        assertEquals(Domain.NOT_NEGATIVE, domain("/readings/bedDepths/0/position"));
+        assertEquals(Domain.EFFICIENCY, domain("/plant/limits/beltGrip"));
+        assertEquals(Domain.POSITIVE, domain("/plant/sealRates"));
+        assertEquals(Domain.POSITIVE, domain("/readings/seals/0/length"));
+    }
+
+    private static Domain domain(String name) {
+        return Draw.domain(Reading.exact(name, 1));
     }
 
     /** With one uncertain reading in the register, three zones alike draw three times the share of one. */

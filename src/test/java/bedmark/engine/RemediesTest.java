@@ -174,6 +174,30 @@ class RemediesTest {
         assertEquals((carried() + 0.7 * 0.8 * 0.4) / (carried() + 0.7 * 0.36), remedy.change().orElseThrow(), 1e-12);
     }
 
+    /** A slower belt carries a deeper bed: with the other zones' share that is too much, and alone it would do. */
+    @Test
+    void theOtherZonesOfTheConveyorCountAgainstARemedy() {
+        Settings slow = Settings.standard().with(new MaximumBeltSpeed(Stream.of(SpeedClass.values())
+                .map(material -> new MaximumBeltSpeed.Row(material, 0.5, true, 1.5)).toList()));
+        Settings free = slow.with(slow.limits().without(Rule.BED_OVER_DESIGN)
+                .without(Rule.FLOW_OVER_CAPACITY).without(Rule.SKIRTS_OVER_BUDGET));
+        Assessment now = Engine.assess(ZONE, free);
+        double share = now.get(Result.DRIVE_SHARE).orElseThrow().value();
+        double then = slower(now).driveShare().orElseThrow();
+        assertEquals(Optional.empty(), slower(now).refusedBecause());
+        assertTrue(then > share && then < 3 * share);
+        Settings bound = free.with(free.limits().with(Rule.SKIRTS_OVER_BUDGET, Limit.ofSite(
+                OptionalDouble.of(share + (share + then) / 2), OptionalDouble.empty())));
+        assertEquals(Optional.empty(), slower(Engine.assess(ZONE, bound)).refusedBecause());
+        assertEquals(Optional.of(Rule.SKIRTS_OVER_BUDGET), slower(Engine.assessConveyor(List.of(ZONE, ZONE), 0, bound)
+                .zones().get(0)).refusedBecause());
+    }
+
+    private static Remedy slower(Assessment assessment) {
+        return assessment.remedies().stream().filter(remedy -> remedy.code().equals("slower-belt")).findFirst()
+                .orElseThrow();
+    }
+
     /** A limit of nothing can be met by no change at all, and one that is nearly met is not worth a change. */
     @Test
     void whatNoChangeCanReachIsNotOffered() {
@@ -193,16 +217,14 @@ class RemediesTest {
     void aBeltThatIsTooFastIsSlowedToWhatItsMaterialBears() {
         Settings slow = Settings.standard().with(new MaximumBeltSpeed(Stream.of(SpeedClass.values())
                 .map(material -> new MaximumBeltSpeed.Row(material, 0.5, true, 1.5)).toList()));
-        Remedy slower = Engine.assess(ZONE, slow).remedies().stream()
-                .filter(remedy -> remedy.code().equals("slower-belt")).findFirst().orElseThrow();
+        Remedy slower = slower(Engine.assess(ZONE, slow));
         assertEquals(1.5, slower.change().orElseThrow(), 1e-12);
         assertEquals(((carried() + 0.7 * 0.12) * 4 / 3 - carried()) / 0.7, slower.meanDepth(), 1e-12);
         assertFalse(slower.ranked());
         Settings iso = slow.with(DragMethod.ISO_5048);
         double drag = Engine.assess(ZONE.with(Datum.BELT_SPEED, 1.5, 0), iso).get(Result.SKIRT_DRAG).orElseThrow()
                 .value();
-        assertEquals(drag, Engine.assess(ZONE, iso).remedies().stream()
-                .filter(remedy -> remedy.code().equals("slower-belt")).findFirst().orElseThrow().skirtDrag(), 1e-9,
+        assertEquals(drag, slower(Engine.assess(ZONE, iso)).skirtDrag(), 1e-9,
                 "the feed comes to another speed in another length");
         Settings never = slow.with(slow.limits().with(Rule.BELT_TOO_FAST, Limit.ofSite(OptionalDouble.of(0),
                 OptionalDouble.empty())));

@@ -4,8 +4,12 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import bedmark.engine.bed.DepthMethod;
 import bedmark.engine.flow.MaximumBeltSpeed;
 import bedmark.engine.flow.SpeedClass;
+import bedmark.engine.seal.SealCondition;
+import bedmark.engine.seal.SealType;
+import bedmark.engine.seal.Side;
 import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.verdict.Rule;
 import java.util.List;
@@ -60,6 +64,10 @@ class ResultsTest {
         Assessment bare = assess(ZONE.without(Datum.ANGLE_OF_REPOSE));
         assertEquals(bare.get(Result.SKIRT_POWER), bare.counted(Result.SKIRT_POWER));
         assertEquals(Optional.empty(), assess(LoadingZone.UNKNOWN).counted(Result.SKIRT_POWER));
+        LoadingZone untouched = Zones.exact(ZONE).withStations(List.of()).withStation(3, 0, DepthMethod.AT_BOARD, 0)
+                .withSeals(List.of()).withSeal(Side.LEFT, SealType.NONE, SealCondition.SOUND, 6, 0)
+                .withSeal(Side.RIGHT, SealType.NONE, SealCondition.SOUND, 6, 0);
+        assertEquals(Optional.of(new Estimate(0, 0)), assess(untouched).counted(Result.SKIRT_POWER));
     }
 
     @Test

@@ -236,6 +236,16 @@ class VerdictTest {
         }
     }
 
+    /** A lower bound of the drive's power at more feed holds on a belt that is level or rises, not on one that falls. */
+    @Test
+    void theDriveAtDesignIsJudgedOnABeltThatDoesNotFall() {
+        LoadingZone more = HEALTHY.with(Datum.DESIGN_THROUGHPUT, 300, 0);
+        for (double incline : new double[] {-0.01, 0, 0.01}) {
+            assertEquals(incline >= 0, Engine.assess(more.with(Datum.INCLINE, incline, 0), Settings.standard())
+                    .findingsAtDesign().stream().anyMatch(finding -> finding.rule() == Rule.DRIVE_NEAR_RATING));
+        }
+    }
+
     /** On a belt that stands, by speed alone, nothing is needed to settle, and no zone is too short for that. */
     @Test
     void aZoneThatNeedsNoLengthIsNotTooShort() {

@@ -81,8 +81,6 @@ class DomainTest {
     void trialsReachFromNoneToTheMost() {
         assertEquals(0, Conventions.standard().withTrials(0).trials());
         assertEquals(100_000, Conventions.standard().withTrials(Conventions.MOST_TRIALS).trials());
-        assertEquals(100_000, Engine.monteCarlo(List.of(LoadingZone.UNKNOWN), Settings.standard(), 1, 100_000).get(0)
-                .trials());
         for (int trials : new int[] {-1, 100_001}) {
             ImpossibleReading refusal = assertThrows(ImpossibleReading.class,
                     () -> Conventions.standard().withTrials(trials));

@@ -168,6 +168,12 @@ class MonteCarloAgreementTest {
         assertTrue(apart / compared < 0.01, "on average " + apart / compared);
     }
 
+    @Test
+    void asManyTrialsAsASiteMayAskForAreDrawn() {
+        assertEquals(Conventions.MOST_TRIALS, Engine.monteCarlo(List.of(LoadingZone.UNKNOWN), Settings.standard(), 1,
+                Conventions.MOST_TRIALS).get(0).trials());
+    }
+
     private static MonteCarlo drawn(LoadingZone zone) {
         return Engine.monteCarlo(List.of(zone), Settings.standard(), SEED, TRIALS).get(0);
     }

@@ -84,19 +84,16 @@ final class AllowedDepths {
         return limit.isPresent() ? OptionalDouble.of(depth.applyAsDouble(limit.getAsDouble())) : limit;
     }
 
+    /** Whether the drag tells of a depth: the one method that goes by the flow may know it without any bed. */
     private boolean hasDepthOfDrag() {
-        boolean byFlow = zone.method() == DragMethod.ISO_5048;
         return today.materialDrag().get().value() > 0 && zone.beltSpeed().get().value() > 0
-                && (byFlow ? today.area().isKnown() : today.integralOfSquare().get().value() > 0);
+                && (zone.method() != DragMethod.ISO_5048 || today.area().isKnown());
     }
 
     /** The depth at which the skirts take a power at the motor shaft (W). */
     private double depthOfPower(double power) {
         double force = power * zone.number(Datum.DRIVE_EFFICIENCY).get().value() / zone.beltSpeed().get().value();
-        double drag = force - zone.sealDrag().get().value();
-        if (drag <= 0) {
-            return 0;
-        }
+        double drag = Math.max(0, force - zone.sealDrag().get().value());
         double share = drag / today.materialDrag().get().value();
         return zone.method() == DragMethod.ISO_5048 ? depth(today.area().get().value() * Math.sqrt(share))
                 : Math.sqrt(share * today.integralOfSquare().get().value() / zone.length().get().value());

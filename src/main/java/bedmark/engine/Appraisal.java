@@ -51,9 +51,8 @@ final class Appraisal {
 
     /** Whether more than one station may be the deepest: the greatest of several numbers is no straight line either. */
     boolean isContested() {
-        return today.profile().isKnown() && today.profile().get().stations() > 1 && today.profile().get().isContested(
-                points(today.profile().get()).stream().mapToDouble(point -> point.depth().standardUncertainty())
-                        .toArray());
+        return today.profile().isKnown() && today.profile().get().isContested(points(today.profile().get()).stream()
+                .mapToDouble(point -> point.depth().standardUncertainty()).toArray());
     }
 
     /** Judges the rules on the depth by drawing their readings. */

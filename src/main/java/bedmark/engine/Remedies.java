@@ -67,7 +67,7 @@ final class Remedies {
 
     /** The remedies that the readings support: first those that may be ranked, the greatest saving ahead. */
     List<Remedy> all() {
-        if (!now.skirtPower().isKnown() || !zone.section().isKnown()) {
+        if (!now.skirtPower().isKnown() || !zone.section().isKnown() || !zone.profile().isKnown()) {
             return List.of();
         }
         List<Remedy> remedies = new ArrayList<>();

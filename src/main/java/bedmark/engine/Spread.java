@@ -57,7 +57,7 @@ final class Spread {
                 highest = highest == null || drag > methods.get(highest).get().value() ? entry.getKey() : highest;
             }
         }
-        if (lowest == highest || methods.get(lowest).get().value() <= 0 || squares() <= 0
+        if (lowest == highest || methods.get(lowest).get().value() <= 0
                 || !zone.number(Datum.BULK_DENSITY).isKnown()) {
             return Optional.empty();
         }

@@ -1,6 +1,7 @@
 package bedmark.engine;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.bed.DepthMethod;
@@ -113,6 +114,19 @@ class AllowedDepthTest {
                 .withStations(List.of()).withStation(0, 0, DepthMethod.AT_BOARD, 0)));
         assertEquals(List.of(Rule.BED_OVER_BOARD, Rule.BED_OVER_DESIGN), rules(ZONE.with(Datum.THROUGHPUT, 0, 0)
                 .with(Datum.BELT_SPEED, 0, 0)));
+    }
+
+    /** By ISO 5048 the drag is known from the flow alone, but no depth is; the others tell a depth without a section. */
+    @Test
+    void aDepthIsToldWhereTheDragComesFromABed() {
+        LoadingZone bare = ZONE.withStations(List.of());
+        Settings iso = Zones.exactSettings().with(DragMethod.ISO_5048);
+        assertTrue(Engine.assess(bare, iso).get(Result.DRIVE_SHARE).isPresent());
+        List<Rule> ofBed = List.of(Rule.BED_OVER_BOARD, Rule.BED_OVER_DESIGN);
+        assertEquals(ofBed, Engine.assess(bare, iso).allowedDepths().stream().map(AllowedDepth::rule).toList());
+        assertEquals(List.of(Rule.BED_OVER_BOARD, Rule.BED_OVER_DESIGN, Rule.DRIVE_NEAR_RATING,
+                Rule.SKIRTS_OVER_BUDGET), rules(ZONE.without(Datum.SURCHARGE_ANGLE)));
+        assertFalse(rules(ZONE.with(Datum.THROUGHPUT, 0, 0)).contains(Rule.FLOW_OVER_CAPACITY), "nothing to scale");
     }
 
     private static List<Rule> rules(LoadingZone zone) {

@@ -1,6 +1,7 @@
 package bedmark.engine;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.verdict.Finding;
@@ -22,6 +23,13 @@ class ConveyorTest {
             assertEquals(budget, finding.overloaded().orElseThrow());
             assertEquals(Math.min(0.10, budget), finding.near().orElseThrow());
         }
+    }
+
+    @Test
+    void theSumIsLedByAReadingOfTheZonesOwn() {
+        LoadingZone coarse = Zones.exact(ZONE).with(Datum.BELT_SPEED, 2, 0.2);
+        assertEquals(Optional.of("/readings/beltSpeed"), skirts(Engine.assess(coarse, Settings.standard()))
+                .orElseThrow().leadingReading());
     }
 
     @Test
@@ -57,6 +65,7 @@ class ConveyorTest {
     void aSumThatLacksZonesShowsOnlyThatTheLimitIsPassed() {
         Assessment alone = Engine.assessConveyor(List.of(ZONE), 2, Settings.standard()).zones().get(0);
         assertEquals(Optional.empty(), skirts(alone));
+        assertEquals(List.of(), alone.refused(), "a zone that is not surveyed yet is no refusal");
         LoadingZone weak = ZONE.with(Datum.RATED_POWER, 5_000, 0);
         Assessment passed = Engine.assessConveyor(List.of(weak), 2, Settings.standard()).zones().get(0);
         assertEquals(Level.NEAR, skirts(passed).orElseThrow().level());
@@ -83,6 +92,10 @@ class ConveyorTest {
         double other = both.get(1).get(Result.DRIVE_SHARE).orElseThrow().value();
         assertEquals(alone + other, skirtsAtDesign(both.get(0)), 1e-12);
         assertEquals(List.of(), both.get(1).findingsAtDesign());
+        Assumption asToday = Assumption.of("conveyor-sum-at-todays-feed", "1");
+        assertTrue(both.get(0).assumptions().contains(asToday));
+        Assessment lacking = Engine.assessConveyor(List.of(half, unweighed), 2, Settings.standard()).zones().get(0);
+        assertFalse(lacking.assumptions().contains(asToday), "of a sum that nothing is judged by");
     }
 
     private static double spread(LoadingZone zone, int zones) {

@@ -60,6 +60,24 @@ class EveryInputTest {
         assertTrue(reasons.size() > 5, reasons::toString);
     }
 
+    /** A survey comes to be in any order, and a site may have chosen any method. */
+    @Test
+    void anyPartOfAZoneIsComputedAsFarAsItGoes() {
+        Random random = new Random(6);
+        for (int i = 0; i < Zones.MANY; i++) {
+            LoadingZone zone = Zones.random(random);
+            for (Datum datum : Datum.values()) {
+                zone = random.nextInt(6) == 0 ? zone.without(datum) : zone;
+            }
+            zone = random.nextInt(4) == 0 ? zone.withStations(List.of()) : zone;
+            zone = random.nextInt(6) == 0 ? zone.withSeals(List.of()) : zone;
+            Settings settings = random.nextInt(5) == 0 ? Settings.standard()
+                    : Settings.standard().with(DragMethod.values()[random.nextInt(4)]);
+            sound(Engine.assess(zone, settings));
+            Engine.explain(zone, settings);
+        }
+    }
+
     @Test
     void theGreatestAndTheLeastPossibleNumbersStayFinite() {
         Random random = new Random(5);

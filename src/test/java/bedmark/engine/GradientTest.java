@@ -23,7 +23,8 @@ class GradientTest {
     @Test
     void everyDerivativeIsThatOfTheResult() {
         Random random = new Random(20_260_101);
-        for (int i = 0; i < 100; i++) {
+        int zones = Zones.atMost(100);
+        for (int i = 0; i < zones; i++) {
             LoadingZone zone = Zones.exact(Zones.random(random));
             for (Datum datum : zone.data().keySet()) {
                 compare(datum.pointer(), zone.data().get(datum).value(), reading -> {
@@ -48,7 +49,7 @@ class GradientTest {
                                 segment.condition(), reading))));
             }
         }
-        assertTrue(compared > 20_000, () -> compared + " derivatives");
+        assertTrue(compared > 200 * zones, () -> compared + " derivatives");
     }
 
     /** With one uncertain reading a standard uncertainty is the size of the derivative times that reading's own. */

@@ -8,6 +8,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.engine.bed.DepthMethod;
 import bedmark.engine.drag.DragMethod;
 import bedmark.engine.uncertainty.Distribution;
+import bedmark.engine.uncertainty.Estimate;
+import bedmark.engine.uncertainty.NormalDistribution;
 import bedmark.engine.uncertainty.Reading;
 import bedmark.engine.uncertainty.Tape;
 import bedmark.engine.uncertainty.Uncertain;
@@ -28,7 +30,7 @@ class HypercubeTest {
             double[] drawn = new Hypercube(trials).zone(tape).of(depth);
             double[] sorted = drawn.clone();
             Arrays.sort(sorted);
-            double[] strata = bedmark.engine.uncertainty.NormalDistribution.strata(trials);
+            double[] strata = NormalDistribution.strata(trials);
             for (int i = 0; i < trials; i++) {
                 assertEquals(100 + 2 * strata[i], sorted[i], 1e-9);
             }
@@ -60,6 +62,20 @@ class HypercubeTest {
         double[] share = readings.of(tape.take(new Reading(Datum.DRIVE_EFFICIENCY.pointer(), 0.98, 0.03)));
         assertTrue(Arrays.stream(share).max().orElseThrow() <= 1 + 1e-4, "no efficiency over one");
         assertTrue(Distribution.of(share).mean() < 0.98);
+    }
+
+    /** What is left of a cut distribution is cut into equal strata again, each drawn in its middle. */
+    @Test
+    void strataOfACutReadingAreEquallyLikely() {
+        Tape tape = new Tape(8);
+        Reading depth = new Reading(ZoneFacts.DEPTHS + "/0/depth", 0.01, 0.02);
+        double[] drawn = new Hypercube(TRIALS).zone(tape).of(tape.take(depth));
+        Arrays.sort(drawn);
+        double below = NormalDistribution.under(0, depth.estimate());
+        for (int i = 0; i < TRIALS; i++) {
+            double under = NormalDistribution.over(0, new Estimate(drawn[i] - 0.01, 0.02));
+            assertEquals(below + (1 - below) * (i + 0.5) / TRIALS, under, 2e-4);
+        }
     }
 
     @Test

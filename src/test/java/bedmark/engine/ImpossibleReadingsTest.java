@@ -70,6 +70,10 @@ class ImpossibleReadingsTest {
         assertDoesNotThrow(() -> check(ZONE.with(Datum.READ_SPACING, reach, 0)));
         LoadingZone flat = ZONE.with(Datum.TROUGH_ANGLE, 0, 0).without(Datum.CENTRE_ROLL);
         assertDoesNotThrow(() -> check(flat.with(Datum.READ_SPACING, 1.2, 0)));
+        double rounded = 1.2 * (1 + 1e-9);
+        assertDoesNotThrow(() -> check(flat.with(Datum.READ_SPACING, rounded, 0)), "as units round");
+        refused("board-beyond-wing-rolls", "/readings/skirtSpacing",
+                () -> check(flat.with(Datum.READ_SPACING, Math.nextUp(rounded), 0)));
         refused("board-beyond-wing-rolls", "/readings/skirtSpacing",
                 () -> check(flat.with(Datum.READ_SPACING, 1.21, 0)));
     }
@@ -91,6 +95,10 @@ class ImpossibleReadingsTest {
                 () -> check(ZONE.withStation(-0.1, 0.2, DepthMethod.AT_BOARD, 0)));
         refused("reading-negative", "/readings/bedDepths/2/depth",
                 () -> check(ZONE.withStation(2, -0.2, DepthMethod.AT_BOARD, 0)));
+        double rounded = 6 * (1 + 1e-9);
+        assertDoesNotThrow(() -> check(ZONE.withStation(rounded, 0.2, DepthMethod.AT_BOARD, 0)), "as units round");
+        refused("station-outside-zone", "/readings/bedDepths/2/position",
+                () -> check(ZONE.withStation(Math.nextUp(rounded), 0.2, DepthMethod.AT_BOARD, 0)));
         assertDoesNotThrow(() -> check(ZONE.withStation(6, 0.2, DepthMethod.AT_BOARD, 0)
                 .withStation(0, 0.2, DepthMethod.AT_BOARD, 0)));
     }
@@ -101,6 +109,10 @@ class ImpossibleReadingsTest {
                 () -> check(seals(5.9)));
         assertEquals(List.of("left", "5.9", "6.0"), refusal.arguments());
         refused("seal-lengths-disagree", "/readings/seals", () -> check(seals(6.1)));
+        ImpossibleReading right = refused("seal-lengths-disagree", "/readings/seals", () -> check(seals(6)
+                .withSeal(Side.RIGHT, SealType.NONE, SealCondition.SOUND, 2, 0)
+                .withSeal(Side.RIGHT, SealType.NONE, SealCondition.SOUND, 3, 0)));
+        assertEquals(List.of("right", "5.0", "6.0"), right.arguments());
         assertDoesNotThrow(() -> check(seals(6.06)));
         assertDoesNotThrow(() -> check(seals(5.94)));
         assertDoesNotThrow(() -> check(seals(3).without(Datum.ZONE_LENGTH)), "nothing to compare with yet");

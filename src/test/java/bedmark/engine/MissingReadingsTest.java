@@ -158,6 +158,18 @@ class MissingReadingsTest {
         assertEquals(List.of("/material/angleOfRepose"), chosen.missingRequired());
     }
 
+    /** By ISO 5048 a zone has drag and power before anybody read a depth: there is no bed to change yet. */
+    @Test
+    void aFlowWithoutABedHasItsDragAndNoRemedy() {
+        LoadingZone bare = ZONE.withStations(List.of());
+        Assessment assessment = Engine.assess(bare, Settings.standard().with(DragMethod.ISO_5048));
+        assertEquals(assessment.methods().get(DragMethod.ISO_5048),
+                assessment.get(Result.MATERIAL_DRAG).orElseThrow());
+        assertTrue(assessment.get(Result.SKIRT_POWER).isPresent());
+        assertEquals(List.of(), assessment.remedies());
+        assertEquals(List.of("/readings/bedDepths"), assessment.missingRequired());
+    }
+
     @Test
     void aBeltThatStandsHasNoRatios() {
         Assessment assessment = Engine.assess(ZONE.with(Datum.BELT_SPEED, 0, 0), Settings.standard());
@@ -205,10 +217,39 @@ class MissingReadingsTest {
                 Engine.assess(ZONE, Settings.standard()).assumptions());
     }
 
+    /** The rate that was fitted with the site's factor goes with the site's method, and with no other. */
+    @Test
+    void theFittedSealRateCountsWhereTheSitesMethodDecides() {
+        LoadingZone fitted = ZONE.with(Datum.SITE_FACTOR, 0.08, 0).with(Datum.SITE_SEAL_RATE, 55, 0);
+        Settings site = Settings.standard().with(DragMethod.SITE);
+        Assumption said = Assumption.of("seal-rate-fitted", "55.0");
+        Assessment bySite = Engine.assess(fitted, site);
+        assertEquals(55 * 12, bySite.get(Result.SEAL_DRAG).orElseThrow().value(), 1e-9);
+        assertTrue(bySite.assumptions().contains(said));
+        for (Assessment other : List.of(Engine.assess(fitted, Settings.standard()),
+                Engine.assess(fitted.without(Datum.SITE_SEAL_RATE), site))) {
+            assertEquals(SealRates.CONVENTION * 12, other.get(Result.SEAL_DRAG).orElseThrow().value(), 1e-9);
+            assertTrue(other.assumptions().stream().noneMatch(one -> one.code().startsWith("seal-rate")));
+        }
+    }
+
+    /** ISO 5048 takes the mean of feed and belt speed: where the feed runs against the belt as fast there is none. */
+    @Test
+    void aFeedAgainstTheBeltHasNoSpecialResistance() {
+        assertTrue(Engine.assess(ZONE.with(Datum.FEED_VELOCITY, 2, 0), Settings.standard()).methods()
+                .containsKey(DragMethod.ISO_5048));
+        for (double against : new double[] {-2, -2.1}) {
+            assertFalse(Engine.assess(ZONE.with(Datum.FEED_VELOCITY, against, 0), Settings.standard()).methods()
+                    .containsKey(DragMethod.ISO_5048));
+        }
+    }
+
     @Test
     void theSitesOwnSealRateIsSaid() {
         Settings own = Settings.standard().with(new SealRates(50, Map.of()));
         assertTrue(Engine.assess(ZONE, own).assumptions().contains(Assumption.of("seal-rate-site", "50.0")));
+        assertTrue(Engine.assess(ZONE.withSeals(List.of()), own).assumptions().stream()
+                .noneMatch(one -> one.code().startsWith("seal-rate")), "but not of seals that nobody looked at");
         Settings worn = Settings.standard().with(
                 Settings.standard().sealRates().with(SealType.VERTICAL, SealCondition.SOUND, 1.5));
         assertTrue(Engine.assess(ZONE, worn).assumptions().contains(

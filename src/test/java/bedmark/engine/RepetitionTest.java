@@ -5,8 +5,12 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.bed.DepthMethod;
 import bedmark.engine.bed.Station;
+import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.uncertainty.Reading;
+import bedmark.engine.uncertainty.Sensitivity;
+import bedmark.engine.verdict.Certainty;
 import bedmark.engine.verdict.Finding;
+import bedmark.engine.verdict.Judgement;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Repeat;
 import bedmark.engine.verdict.Rule;
@@ -32,6 +36,52 @@ class RepetitionTest {
             assertTrue(level(depth(depth, needed * 0.999)) != Level.UNDECIDED, "settled at " + depth);
             assertEquals(Level.UNDECIDED, level(depth(depth, needed * 1.001)), "not settled at " + depth);
         }
+    }
+
+    private static Optional<Repeat> repeat(double observed, double uncertainty, Certainty certainty,
+            Sensitivity... sensitivities) {
+        Finding finding = Judgement.of(Rule.BED_OVER_BOARD, new Estimate(observed, uncertainty),
+                Rule.BED_OVER_BOARD.limit(), certainty, Optional.empty());
+        return new Repetition(finding, certainty).of(List.of(sensitivities));
+    }
+
+    private static Sensitivity by(String name, double uncertainty, double derivative) {
+        return new Sensitivity(new Reading("/readings/" + name, 1, uncertainty), derivative);
+    }
+
+    /** 1.6449 standard uncertainties over the limit are 95 % sure, 0.8416 under it leave no more than 20 %. */
+    @Test
+    void howFarAwayIsFarEnoughIsTheSitesOwn() {
+        Certainty own = new Certainty(0.95, 0.2, 0.5);
+        Sensitivity all = by("x", 0.05, 2);
+        assertEquals(0.05 / 1.644_853_627 / 2, repeat(1.05, 0.1, own, all).orElseThrow().standardUncertainty()
+                .orElseThrow(), 1e-9);
+        assertEquals(0.05 / 0.841_621_234 / 2, repeat(0.95, 0.1, own, all).orElseThrow().standardUncertainty()
+                .orElseThrow(), 1e-9);
+    }
+
+    /** A reading is asked to improve by its own share, however fine it already is. */
+    @Test
+    void theShareCountsAndNotTheSize() {
+        Certainty standard = Certainty.standard();
+        double observed = 1 - Math.sqrt(0.005) * 1.2815515655446004;
+        Sensitivity coarse = by("coarse", 1, 0.05);
+        Sensitivity fine = by("fine", 0.01, 6);
+        for (Sensitivity[] order : new Sensitivity[][] {{coarse, fine}, {fine, coarse}}) {
+            Repeat repeat = repeat(observed, Math.sqrt(0.0061), standard, order).orElseThrow();
+            assertEquals("/readings/fine", repeat.reading());
+            assertEquals(0.05 / 6, repeat.standardUncertainty().orElseThrow(), 1e-9);
+        }
+    }
+
+    @Test
+    void ofReadingsAlikeTheFirstIsAskedFor() {
+        Certainty standard = Certainty.standard();
+        assertEquals("/readings/x", repeat(1.07, 0.0707, standard, by("x", 0.05, 1), by("y", 0.05, 1)).orElseThrow()
+                .reading());
+        Repeat hopeless = repeat(1.001, 0.0707, standard, by("x", 0.05, 1), by("y", 0.05, 1)).orElseThrow();
+        assertEquals("/readings/x", hopeless.reading());
+        assertEquals(OptionalDouble.empty(), hopeless.standardUncertainty());
     }
 
     @Test

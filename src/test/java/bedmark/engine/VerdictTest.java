@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.engine.bed.DepthMethod;
+import bedmark.engine.flow.LengthConventions;
 import bedmark.engine.seal.SealCondition;
 import bedmark.engine.seal.SealType;
 import bedmark.engine.seal.Side;
@@ -220,11 +221,51 @@ class VerdictTest {
         assertEquals(Optional.empty(), Engine.assess(LoadingZone.UNKNOWN, Settings.standard()).lowestAllowedDepth());
     }
 
+    /** What is judged anew at design feed is just what comes out otherwise there. */
+    @Test
+    void theRulesThatChangeWithTheFeedAreThoseWhoseNumberDoes() {
+        LoadingZone uneven = HEALTHY.withStations(List.of()).with(Datum.DESIGN_THROUGHPUT, 400, 0)
+                .withStation(1, 0.2, DepthMethod.AT_BOARD, 0).withStation(5.5, 0.15, DepthMethod.AT_BOARD, 0);
+        ZoneFacts zone = new ZoneFacts(Sources.uncertain(uneven, Settings.standard()));
+        FeedFacts today = FeedFacts.today(zone);
+        Observations now = new Observations(today, today);
+        Observations then = new Observations(today, FeedFacts.atDesign(zone).get());
+        for (Rule rule : Rule.values()) {
+            boolean changes = now.of(rule).get().value() != then.of(rule).get().value();
+            assertEquals(changes, Observations.changesWithFeed(rule), rule.code());
+        }
+    }
+
+    /** A lower bound of the drive's power at more feed holds on a belt that is level or rises, not on one that falls. */
+    @Test
+    void theDriveAtDesignIsJudgedOnABeltThatDoesNotFall() {
+        LoadingZone more = HEALTHY.with(Datum.DESIGN_THROUGHPUT, 300, 0);
+        for (double incline : new double[] {-0.01, 0, 0.01}) {
+            assertEquals(incline >= 0, Engine.assess(more.with(Datum.INCLINE, incline, 0), Settings.standard())
+                    .findingsAtDesign().stream().anyMatch(finding -> finding.rule() == Rule.DRIVE_NEAR_RATING));
+        }
+    }
+
+    /** On a belt that stands, by speed alone, nothing is needed to settle, and no zone is too short for that. */
+    @Test
+    void aZoneThatNeedsNoLengthIsNotTooShort() {
+        Settings bySpeed = Settings.standard().with(Conventions.standard().with(
+                new LengthConventions(true, false, false)));
+        LoadingZone standing = HEALTHY.with(Datum.BELT_SPEED, 0, 0).with(Datum.IMPACT_LENGTH, 0, 0);
+        assertTrue(Engine.assess(standing, bySpeed).findings().stream()
+                .noneMatch(finding -> finding.rule() == Rule.ZONE_TOO_SHORT));
+        assertTrue(Engine.assess(standing, Settings.standard()).findings().stream()
+                .anyMatch(finding -> finding.rule() == Rule.ZONE_TOO_SHORT));
+    }
+
     @Test
     void theLeadingComponentIsNamed() {
         assertEquals(Optional.of(Component.SEAL), leading(HEALTHY.with(Datum.FEED_VELOCITY, 2, 0)));
         assertEquals(Optional.of(Component.LOADING), leading(HEALTHY.with(Datum.FEED_VELOCITY, -2, 0)));
         assertEquals(Optional.of(Component.BED), leading(depth(0.39).with(Datum.FEED_VELOCITY, 2, 0)));
+        assertEquals(Optional.of(Component.BED), leading(depth(0).with(Datum.FEED_VELOCITY, 2, 0)
+                .withSeals(List.of()).withSeal(Side.LEFT, SealType.NONE, SealCondition.SOUND, 6, 0)
+                .withSeal(Side.RIGHT, SealType.NONE, SealCondition.SOUND, 6, 0)), "where nothing pulls at all");
         assertEquals(Optional.empty(), leading(LoadingZone.UNKNOWN));
     }
 

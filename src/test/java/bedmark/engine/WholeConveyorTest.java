@@ -62,6 +62,8 @@ class WholeConveyorTest {
         assertTrue(conveyor.get(Result.SKIRT_DRAG).isPresent());
         assertEquals(Optional.empty(), conveyor.get(Result.SKIRT_POWER));
         assertEquals(OptionalInt.of(0), conveyor.leadingZone());
+        assertEquals(OptionalInt.of(0), Engine.assessConveyor(List.of(ZONE, ZONE), 0, Settings.standard())
+                .leadingZone(), "of zones alike the first");
         assertEquals(Level.OVERLOADED, conveyor.level(), "what is there is overloaded already");
     }
 

@@ -26,6 +26,11 @@ final class Zones {
     private Zones() {
     }
 
+    /** As many random zones as wanted, but no more than are worth their time. */
+    static int atMost(int enough) {
+        return Math.min(enough, MANY);
+    }
+
     /** A complete zone within every limit, at a bed that moves with the belt. */
     static LoadingZone healthy() {
         Map<Datum, Reading> data = new EnumMap<>(Datum.class);

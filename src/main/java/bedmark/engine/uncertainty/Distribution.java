@@ -34,7 +34,7 @@ public record Distribution(double mean, double standardDeviation, double low, do
 
     /** Linear between the ordered results, each standing in the middle of its share. */
     private static double quantile(double[] sorted, double probability) {
-        double place = Math.min(sorted.length - 1.0, Math.max(0, probability * sorted.length - 0.5));
+        double place = Math.max(0, probability * sorted.length - 0.5);
         int under = (int) place;
         int over = Math.min(under + 1, sorted.length - 1);
         return sorted[under] + (place - under) * (sorted[over] - sorted[under]);

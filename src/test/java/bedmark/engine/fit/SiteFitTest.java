@@ -106,8 +106,40 @@ class SiteFitTest {
         assertEquals("site-factor-too-uncertain", unfit(List.of(vague(0.3, 0.15), vague(0.3, 0.15))));
     }
 
+    /** A drag that does not change with the depth, or with the seals, has no factor and no rate. */
+    @Test
+    void whatChangesNothingIsNotPositive() {
+        List<DrivePair> level = List.of(new DrivePair(exact("l", LENGTH), exact("v", SPEED), exact("d", 0.9),
+                exact("m", 0.92), state(20_000, 0.3, 30), state(20_000, 0.15, 30)), new DrivePair(exact("l", LENGTH),
+                exact("v", SPEED), exact("d", 0.9), exact("m", 0.92), state(20_000, 0.25, 30),
+                state(20_000, 0.1, 30)));
+        assertEquals("site-factor-not-positive", unfit(level));
+        DriveState lifted = new DriveState(new Reading("p", 20_000, 30), Optional.empty(),
+                Optional.of(exact("s", 0)), Optional.empty());
+        DriveState lowered = new DriveState(new Reading("p", 20_000, 30), Optional.empty(),
+                Optional.of(exact("s", 16)), Optional.empty());
+        DrivePair seals = new DrivePair(exact("l", LENGTH), exact("v", SPEED), exact("d", 0.9), exact("m", 0.92),
+                lowered, lifted);
+        assertEquals("site-seal-rate-not-positive", unfit(List.of(seals, seals)));
+    }
+
+    /** h² falls by 1/16 m² over 1 m, uncertain by 1/32: twice the uncertainty is not yet apart, a little more is. */
+    @Test
+    void depthsWithinTwiceTheirUncertaintyAreAlike() {
+        assertEquals("site-depths-alike", unfit(List.of(emptied(0.0625), emptied(0.0625))));
+        assertTrue(SiteFit.of(List.of(emptied(0.062), emptied(0.062))) instanceof Fitted);
+    }
+
+    private static DrivePair emptied(double spread) {
+        return new DrivePair(exact("l", 1), exact("v", SPEED), exact("d", 0.9), exact("m", 0.92),
+                new DriveState(new Reading("p1", 20_000, 0), depth(0.25, spread), Optional.empty(), Optional.empty()),
+                new DriveState(new Reading("p2", 19_000, 0), depth(0, 0), Optional.empty(), Optional.empty()));
+    }
+
     @Test
     void aFlowThatHardlyDiffersIsTheSame() {
+        assertTrue(SiteFit.of(List.of(flowing(100, 95), flowing(95, 100))) instanceof Fitted, "5 % and no more");
+        assertEquals("site-flows-differ", unfit(List.of(flowing(100, 94.9), flowing(100, 100))));
         assertTrue(SiteFit.of(List.of(flowing(300, 290), flowing(300, 310))) instanceof Fitted);
     }
 

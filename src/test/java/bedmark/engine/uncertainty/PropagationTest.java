@@ -74,6 +74,30 @@ class PropagationTest {
     }
 
     @Test
+    void ofEqualNumbersTheOneThatIsAskedIsTaken() {
+        Uncertain twin = tape.take(new Reading("/readings/twin", 0.7, 1));
+        assertEquals(List.of("/readings/x"), readings(x.max(twin)));
+        assertEquals(List.of("/readings/twin"), readings(twin.max(x)));
+        assertEquals(List.of("/readings/x"), readings(x.min(twin)));
+        assertEquals(List.of("/readings/twin"), readings(twin.min(x)));
+    }
+
+    private List<String> readings(Uncertain number) {
+        return tape.sensitivities(number).stream().map(sensitivity -> sensitivity.reading().name()).toList();
+    }
+
+    @Test
+    void ofReadingsThatBringAsMuchTheFirstOneLeads() {
+        assertEquals("/readings/x", tape.traced(x.plus(y), "/").leading().orElseThrow());
+        assertEquals("/readings/x", tape.traced(y.minus(x), "/").leading().orElseThrow());
+    }
+
+    @Test
+    void aVarianceThatADoubleCannotHoldIsSharedByNobody() {
+        assertEquals(List.of(), tape.shares(x.times(1e-200)));
+    }
+
+    @Test
     void aReadingThatCameAfterAResultHasNoPartInIt() {
         Uncertain sum = x.plus(y);
         for (int i = 0; i < 60; i++) {

@@ -51,7 +51,7 @@ public final class Shell implements Navigator {
     private Optional<RoundModel> walked = Optional.empty();
     private boolean failing;
 
-    /** A window of that size; the start of a walk is shown first. */
+    /** A window of that size; the round that is being walked is shown first, else the start of a walk. */
     public Shell(Workplace workplace, double width, double height) {
         this.workplace = workplace;
         this.scene = new Scene(root, width, height);
@@ -67,7 +67,20 @@ public final class Shell implements Navigator {
         });
         clock.setCycleCount(Animation.INDEFINITE);
         clock.play();
-        toStart();
+        begin();
+    }
+
+    /** A program that ended in the midst of a walk goes on there; else a walk is started. */
+    private void begin() {
+        try {
+            workplace.siteProperty().get()
+                    .flatMap(site -> workplace.walkMemory().goingOn(site, workplace.preferences().person()))
+                    .map(round -> new RoundModel(workplace, round)).ifPresentOrElse(this::toRound, this::toStart);
+        } catch (RuntimeException e) {
+            letGo();
+            workplace.report(e);
+            toStart();
+        }
     }
 
     public Scene scene() {
@@ -215,6 +228,7 @@ public final class Shell implements Navigator {
     @Override
     public void toStart() {
         walked = Optional.empty();
+        workplace.walkMemory().end();
         StartModel model = new StartModel(workplace);
         show(() -> new StartView(workplace, model, this));
     }

@@ -30,6 +30,7 @@ public final class Workplace implements AutoCloseable {
     private final Optional<Path> samples;
     private final Scribe scribe;
     private final PreferencesFile preferencesFile;
+    private final WalkMemory walkMemory;
     private Optional<BackgroundProof> proof = Optional.empty();
     private final ExecutorService longWork = Executors.newSingleThreadExecutor(run -> {
         Thread thread = new Thread(run, "long-work");
@@ -61,6 +62,7 @@ public final class Workplace implements AutoCloseable {
         this.samples = samples;
         this.scribe = new Scribe(store, screen);
         this.preferencesFile = new PreferencesFile(store.folder());
+        this.walkMemory = new WalkMemory(store, clock);
         this.preferences = new SimpleObjectProperty<>(preferencesFile.read());
         this.site = new ReadOnlyObjectWrapper<>(site);
         preferences.addListener((property, before, now) -> {
@@ -101,6 +103,11 @@ public final class Workplace implements AutoCloseable {
 
     public Scribe scribe() {
         return scribe;
+    }
+
+    /** Which walk a program that starts anew goes on with. */
+    public WalkMemory walkMemory() {
+        return walkMemory;
     }
 
     public FolderChoice folderChoice() {

@@ -22,6 +22,9 @@ import javafx.stage.Window;
  */
 public final class StartProbe {
     private static final long LOOK_MILLIS = 1;
+    /** The goal that is reached by going on with a walk, and its end by the battery instead of by closing the window. */
+    private static final String ROUND = "search";
+    private static final String CUT = "cut";
     private static final double NANOS_TO_MILLI = 1e6;
 
     private StartProbe() {
@@ -30,10 +33,11 @@ public final class StartProbe {
     /**
      * Starts.
      *
-     * @param arguments {@code bare} or {@code app}, and the id of what is in sight on the screen that is waited for
+     * @param arguments {@code bare} or {@code app}, the id of what is in sight on the screen that is waited for, and
+     *                  {@code cut} for an end without closing anything
      */
     public static void main(String[] arguments) {
-        Thread looking = new Thread(() -> begin(arguments[1]));
+        Thread looking = new Thread(() -> begin(arguments[1], arguments.length > 2 && arguments[2].equals(CUT)));
         looking.setDaemon(true);
         looking.start();
         if (arguments[0].equals("bare")) {
@@ -44,10 +48,10 @@ public final class StartProbe {
     }
 
     /** Begins to watch the frames as soon as there is a toolkit. */
-    private static void begin(String goal) {
+    private static void begin(String goal, boolean cut) {
         while (true) {
             try {
-                Platform.runLater(() -> new Watch(goal).start());
+                Platform.runLater(() -> new Watch(goal, cut).start());
                 return;
             } catch (IllegalStateException e) {
                 pause();
@@ -66,10 +70,12 @@ public final class StartProbe {
     /** Does at each frame what the person would do next, and ends at the second frame of the goal. */
     private static final class Watch extends AnimationTimer {
         private final String goal;
+        private final boolean cut;
         private int frames;
 
-        Watch(String goal) {
+        Watch(String goal, boolean cut) {
             this.goal = goal;
+            this.cut = cut;
         }
 
         @Override
@@ -78,14 +84,19 @@ public final class StartProbe {
                 Scene scene = window.getScene();
                 if (scene.lookup("#" + goal) != null) {
                     frames++;
-                } else if (goal.equals("search") && scene.lookup("#person") instanceof TextInputControl person) {
+                } else if (goal.equals(ROUND) && scene.lookup("#person") instanceof TextInputControl person) {
                     person.setText("A. Vale");
                     press(scene.lookup("#caution-read"));
                     press(scene.lookup("#start-walk"));
                 }
             }
             if (frames == 2) {
-                ended();
+                stop();
+                tell();
+                if (cut) {
+                    Runtime.getRuntime().halt(0);
+                }
+                Platform.exit();
             }
         }
 
@@ -96,7 +107,7 @@ public final class StartProbe {
         }
     }
 
-    private static void ended() {
+    private static void tell() {
         long taken = System.currentTimeMillis() - ManagementFactory.getRuntimeMXBean().getStartTime();
         OperatingSystemMXBean system = ManagementFactory.getPlatformMXBean(OperatingSystemMXBean.class);
         double busy = system.getProcessCpuTime() / NANOS_TO_MILLI;
@@ -104,7 +115,6 @@ public final class StartProbe {
         long used = ManagementFactory.getMemoryMXBean().getHeapMemoryUsage().getUsed();
         System.out.println("started " + taken + " " + busy + " " + used);
         System.out.flush();
-        Runtime.getRuntime().halt(0);
     }
 
     /** One label in a window. */

@@ -34,19 +34,24 @@ record StartedProgram(List<String> command, BenchDisplay display) {
     record Started(double millis, double busyMillis, double heap) {
     }
 
-    /** @param home the person's home, with the store that a program without arguments opens */
-    static StartedProgram make(Path home, BenchDisplay display, String program, String goal)
+    /**
+     * Makes the archive.
+     *
+     * @param home      the person's home, with the store that a program without arguments opens
+     * @param arguments of {@link StartProbe}
+     */
+    static StartedProgram make(Path home, BenchDisplay display, String... arguments)
             throws IOException, InterruptedException {
-        Path archive = home.resolve(goal + ".jsa");
-        Path classes = home.resolve(goal + ".lst");
+        Path archive = home.resolve(String.join("-", arguments) + ".jsa");
+        Path classes = home.resolve(String.join("-", arguments) + ".lst");
         String classpath = classpath(home);
         List<String> flags = flags(home, display);
-        run(command(flags, List.of("-Xshare:off", "-XX:DumpLoadedClassList=" + classes), classpath, program, goal),
+        run(command(flags, List.of("-Xshare:off", "-XX:DumpLoadedClassList=" + classes), classpath, arguments),
                 display);
         run(command(flags, List.of("-Xshare:dump", "-XX:SharedClassListFile=" + classes,
-                "-XX:SharedArchiveFile=" + archive), classpath, program, goal), display);
-        return new StartedProgram(command(flags, List.of("-XX:SharedArchiveFile=" + archive), classpath, program,
-                goal), display);
+                "-XX:SharedArchiveFile=" + archive), classpath, arguments), display);
+        return new StartedProgram(command(flags, List.of("-XX:SharedArchiveFile=" + archive), classpath, arguments),
+                display);
     }
 
     private static List<String> flags(Path home, BenchDisplay display) throws IOException {
@@ -58,13 +63,14 @@ record StartedProgram(List<String> command, BenchDisplay display) {
         return flags;
     }
 
-    private static List<String> command(List<String> flags, List<String> sharing, String classpath, String program,
-                                        String goal) {
+    private static List<String> command(List<String> flags, List<String> sharing, String classpath,
+                                        String... arguments) {
         List<String> command = new ArrayList<>();
         command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
         command.addAll(flags);
         command.addAll(sharing);
-        command.addAll(List.of("-cp", classpath, StartProbe.class.getName(), program, goal));
+        command.addAll(List.of("-cp", classpath, StartProbe.class.getName()));
+        command.addAll(List.of(arguments));
         return command;
     }
 

@@ -8,8 +8,8 @@ import java.util.List;
 
 /**
  * From the start of the virtual machine to a round that can be worked on, in a store of 5,000 surveys, against a bare
- * window with the same flags: each a process of its own with an archive of its own classes, turn by turn. Twice: a walk
- * that goes on, and the start of a walk.
+ * window with the same flags: each a process of its own with an archive of its own classes, turn by turn. Three
+ * times: a walk that goes on, the same after the battery died in its midst, and the start of a walk.
  */
 final class WindowSuite implements Suite {
     private static final int SURVEYS = Integer.getInteger("bench.window.surveys", 5_000);
@@ -28,21 +28,33 @@ final class WindowSuite implements Suite {
             StartedProgram bare = StartedProgram.make(folder.path(), display, "bare", "bare");
             // The first time the card is read and the walk begun; from then on it goes on.
             StartedProgram round = StartedProgram.make(folder.path(), display, "app", "search");
+            StartedProgram cut = StartedProgram.make(folder.path(), display, "app", "search", "cut");
+            endWalk(store);
             StartedProgram start = StartedProgram.make(folder.path(), display, "app", "start-walk");
             Figures bares = new Figures();
             Figures rounds = new Figures();
+            Figures cuts = new Figures();
             Figures starts = new Figures();
             for (int turn = 0; turn < TURNS; turn++) {
                 bares.take(turn, bare.start());
                 round.start();
                 rounds.take(turn, round.start());
-                Files.deleteIfExists(store.resolve("walk.json"));
+                cut.start();
+                cuts.take(turn, cut.start());
+                round.start();
+                endWalk(store);
                 starts.take(turn, start.start());
             }
             return List.of(row("start to the round that is walked", rounds, bares, display),
+                    row("the same after the battery died", cuts, bares, display),
                     row("start to the start of a walk", starts, bares, display),
                     new Row("heap in use at the round", rounds.heap / (1 << 20), "MB", 120, true));
         }
+    }
+
+    /** So that the next start is one of a walk. */
+    private static void endWalk(Path store) throws IOException {
+        Files.deleteIfExists(store.resolve("walk.json"));
     }
 
     private static Row row(String what, Figures figures, Figures bares, BenchDisplay display) {

@@ -41,7 +41,7 @@ public final class Shell implements Navigator {
     private static final Duration CLOCK_TICK = Duration.seconds(20);
 
     private final Workplace workplace;
-    private final BorderPane root = new BorderPane();
+    private final BorderPane root;
     private final Scene scene;
     private final Timeline clock = new Timeline(new KeyFrame(CLOCK_TICK, event -> followClock()));
     private Supplier<Screen> current;
@@ -53,8 +53,14 @@ public final class Shell implements Navigator {
 
     /** A window of that size; the round that is being walked is shown first, else the start of a walk. */
     public Shell(Workplace workplace, double width, double height) {
+        this(workplace, FirstScene.plain(width, height), goingOn(workplace));
+    }
+
+    /** As above, in a scene that is there already, with what {@link #goingOn} found. */
+    Shell(Workplace workplace, FirstScene first, Optional<RoundModel> goingOn) {
         this.workplace = workplace;
-        this.scene = new Scene(root, width, height);
+        this.scene = first.scene();
+        this.root = first.root();
         dress();
         workplace.preferencesProperty().addListener((property, before, now) -> preferencesChanged(before, now));
         scene.widthProperty().addListener((property, before, now) -> turn());
@@ -67,19 +73,31 @@ public final class Shell implements Navigator {
         });
         clock.setCycleCount(Animation.INDEFINITE);
         clock.play();
-        begin();
+        begin(goingOn);
     }
 
-    /** A program that ended in the midst of a walk goes on there; else a walk is started. */
-    private void begin() {
+    private void begin(Optional<RoundModel> goingOn) {
         try {
-            workplace.siteProperty().get()
-                    .flatMap(site -> workplace.walkMemory().goingOn(site, workplace.preferences().person()))
-                    .map(round -> new RoundModel(workplace, round)).ifPresentOrElse(this::toRound, this::toStart);
+            goingOn.ifPresentOrElse(this::showRound, this::toStart);
         } catch (RuntimeException e) {
             letGo();
             workplace.report(e);
             toStart();
+        }
+    }
+
+    /**
+     * The round that a program which ended in the midst of a walk goes on with. Touches no screen, so that it can be read
+     * before there is one.
+     */
+    static Optional<RoundModel> goingOn(Workplace workplace) {
+        try {
+            return workplace.siteProperty().get()
+                    .flatMap(site -> workplace.walkMemory().goingOn(site, workplace.preferences().person()))
+                    .map(round -> new RoundModel(workplace, round));
+        } catch (RuntimeException e) {
+            workplace.report(e);
+            return Optional.empty();
         }
     }
 
@@ -240,11 +258,15 @@ public final class Shell implements Navigator {
 
     @Override
     public void toRound(RoundModel round) {
-        walked = Optional.of(round);
         round.reload();
-        show(() -> new RoundView(workplace, round, this));
+        showRound(round);
         // What was completed a moment ago may still be on its way to the store.
         workplace.scribe().afterwards(round::reload);
+    }
+
+    private void showRound(RoundModel round) {
+        walked = Optional.of(round);
+        show(() -> new RoundView(workplace, round, this));
     }
 
     @Override

@@ -7,12 +7,13 @@ import javafx.stage.DirectoryChooser;
 import javafx.stage.FileChooser;
 import javafx.stage.Stage;
 
-/** Asks by the dialogs of the machine, over one window. */
+/** Asks by the dialogs of the machine, over one window; nothing is asked before that is there. */
 final class StageChoice implements FolderChoice {
-    private final Stage stage;
+    private Stage stage;
 
-    StageChoice(Stage stage) {
-        this.stage = stage;
+    /** From now on asks over that window. Called by the screen. */
+    void over(Stage window) {
+        stage = window;
     }
 
     @Override

@@ -60,7 +60,7 @@ public final class Bedmark {
         if (OfficeStore.isOffice(folder)) {
             return OfficeApp.open(OfficeStore.open(folder, OfficeOptions.of(clock)), clock);
         }
-        BedmarkApp.prepare();
+        BedmarkApp.prepare(folder, clock);
         StoreOptions options = BedmarkApp.options(clock);
         if (new StoreFolder(folder, options).sealed()) {
             return BedmarkApp.unlock(folder, passphrase -> Store.open(folder,

@@ -1,11 +1,9 @@
 package bedmark.bench;
 
-import bedmark.index.Store;
-import bedmark.screen.BedmarkApp;
+import bedmark.Bedmark;
+import com.sun.management.OperatingSystemMXBean;
 import java.lang.management.ManagementFactory;
-import java.nio.file.Path;
-import java.time.Clock;
-import java.util.Optional;
+import java.util.List;
 import javafx.animation.AnimationTimer;
 import javafx.application.Application;
 import javafx.application.Platform;
@@ -19,38 +17,41 @@ import javafx.stage.Stage;
 import javafx.stage.Window;
 
 /**
- * A program that starts and prints how long that took and how much of the heap is in use then: the milliseconds from the
- * start of the virtual machine to the second frame of a bare window, or to that of the round that is under way.
+ * A program that starts and prints how long that took, how long its threads were busy, and how much of the heap is in
+ * use then: from the start of the virtual machine to the second frame of a bare window, or of a screen of the app.
  */
 public final class StartProbe {
     private static final long LOOK_MILLIS = 1;
+    /** The goal that is reached by going on with a walk, and its end by the battery instead of by closing the window. */
+    private static final String ROUND = "search";
+    private static final String CUT = "cut";
+    private static final double NANOS_TO_MILLI = 1e6;
 
     private StartProbe() {
     }
 
-    /** @param arguments {@code bare}, or {@code app} and the store's folder */
+    /**
+     * Starts.
+     *
+     * @param arguments {@code bare} or {@code app}, the id of what is in sight on the screen that is waited for, and
+     *                  {@code cut} for an end without closing anything
+     */
     public static void main(String[] arguments) {
-        boolean app = arguments[0].equals("app");
-        Thread looking = new Thread(() -> begin(app ? "search" : "bare"));
+        Thread looking = new Thread(() -> begin(arguments[1], arguments.length > 2 && arguments[2].equals(CUT)));
         looking.setDaemon(true);
         looking.start();
-        if (!app) {
+        if (arguments[0].equals("bare")) {
             Application.launch(Bare.class);
-            return;
-        }
-        Clock clock = Clock.systemUTC();
-        Path folder = Path.of(arguments[1]);
-        BedmarkApp.prepare();
-        try (Store store = Store.open(folder, BedmarkApp.options(clock))) {
-            BedmarkApp.open(store, clock, Optional.empty(), false);
+        } else {
+            Bedmark.main();
         }
     }
 
     /** Begins to watch the frames as soon as there is a toolkit. */
-    private static void begin(String goal) {
+    private static void begin(String goal, boolean cut) {
         while (true) {
             try {
-                Platform.runLater(() -> new Watch(goal).start());
+                Platform.runLater(() -> new Watch(goal, cut).start());
                 return;
             } catch (IllegalStateException e) {
                 pause();
@@ -69,26 +70,33 @@ public final class StartProbe {
     /** Does at each frame what the person would do next, and ends at the second frame of the goal. */
     private static final class Watch extends AnimationTimer {
         private final String goal;
+        private final boolean cut;
         private int frames;
 
-        Watch(String goal) {
+        Watch(String goal, boolean cut) {
             this.goal = goal;
+            this.cut = cut;
         }
 
         @Override
         public void handle(long now) {
-            for (Window window : Window.getWindows()) {
+            for (Window window : List.copyOf(Window.getWindows())) {
                 Scene scene = window.getScene();
                 if (scene.lookup("#" + goal) != null) {
                     frames++;
-                } else if (scene.lookup("#person") instanceof TextInputControl person) {
+                } else if (goal.equals(ROUND) && scene.lookup("#person") instanceof TextInputControl person) {
                     person.setText("A. Vale");
                     press(scene.lookup("#caution-read"));
                     press(scene.lookup("#start-walk"));
                 }
             }
             if (frames == 2) {
-                ended();
+                stop();
+                tell();
+                if (cut) {
+                    Runtime.getRuntime().halt(0);
+                }
+                Platform.exit();
             }
         }
 
@@ -99,13 +107,14 @@ public final class StartProbe {
         }
     }
 
-    private static void ended() {
+    private static void tell() {
         long taken = System.currentTimeMillis() - ManagementFactory.getRuntimeMXBean().getStartTime();
+        OperatingSystemMXBean system = ManagementFactory.getPlatformMXBean(OperatingSystemMXBean.class);
+        double busy = system.getProcessCpuTime() / NANOS_TO_MILLI;
         System.gc();
         long used = ManagementFactory.getMemoryMXBean().getHeapMemoryUsage().getUsed();
-        System.out.println("started " + taken + " " + used);
+        System.out.println("started " + taken + " " + busy + " " + used);
         System.out.flush();
-        Runtime.getRuntime().halt(0);
     }
 
     /** One label in a window. */

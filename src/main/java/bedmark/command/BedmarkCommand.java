@@ -44,6 +44,27 @@ public final class BedmarkCommand implements Callable<Integer> {
      * @return its exit code
      */
     public static int run(Surroundings surroundings, String... arguments) {
+        return arguments.length == 0 ? open(surroundings) : execute(surroundings, arguments);
+    }
+
+    /** As the desktop starts it: there is no line to be read, and making ready for one would hold up the window. */
+    private static int open(Surroundings surroundings) {
+        int code;
+        try {
+            code = OpenCommand.open(surroundings, OpenCommand.ownStore(), false);
+        } catch (Exception e) {
+            code = failed(surroundings, e);
+        }
+        flush(surroundings);
+        return code;
+    }
+
+    private static void flush(Surroundings surroundings) {
+        surroundings.out().flush();
+        surroundings.err().flush();
+    }
+
+    private static int execute(Surroundings surroundings, String... arguments) {
         CommandLine line = new CommandLine(new BedmarkCommand(surroundings))
                 .addSubcommand(new OpenCommand(surroundings))
                 .addSubcommand(new AssessCommand(surroundings))
@@ -69,8 +90,7 @@ public final class BedmarkCommand implements Callable<Integer> {
                 .setParameterExceptionHandler(BedmarkCommand::badUse)
                 .setExecutionExceptionHandler((failure, failed, parsed) -> failed(surroundings, failure));
         int code = line.execute(arguments);
-        surroundings.out().flush();
-        surroundings.err().flush();
+        flush(surroundings);
         return code;
     }
 

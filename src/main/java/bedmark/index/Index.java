@@ -20,7 +20,7 @@ import java.util.UUID;
 
 /** Takes entries into the database, one by one or many at once, in the order of the journal. */
 final class Index implements AutoCloseable {
-    static final String FORMAT = "3";
+    static final String FORMAT = "4";
     static final String UNREAD = "?";
     private static final int BATCH = 1000;
     private static final String ENTRY = "insert into entry values (?, ?, ?, ?, ?, ?, ?, ?, ?)";

@@ -55,7 +55,9 @@ final class Queries {
             values.add(InspectionStatus.INSPECTED.name());
         }
         String where = conditions.isEmpty() ? "" : " where " + String.join(" and ", conditions);
-        String order = " order by s.first_no" + (query.newest().isPresent() ? " desc limit ?" : "");
+        // Named with the transfer point, the newest of one lies at the head of an index, and the others are not read.
+        String order = " order by " + (query.newest().isEmpty() ? "s.first_no"
+                : (query.transfer().isPresent() ? "s.transfer, " : "") + "s.first_no desc limit ?");
         query.newest().ifPresent(values::add);
         List<SurveyLine> lines = new ArrayList<>(database.rows("select " + SurveyRow.COLUMNS + " from survey s" + where
                 + order, SurveyRow::read, values.toArray()).stream().map(SurveyRow::line).toList());

@@ -4,6 +4,7 @@ import bedmark.diary.Diary;
 import bedmark.diary.Happening;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
+import bedmark.screen.round.RoundModel;
 import bedmark.screen.start.UnlockModel;
 import bedmark.screen.start.UnlockView;
 import bedmark.screen.theme.Light;
@@ -19,6 +20,7 @@ import java.time.Duration;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
+import javafx.animation.PauseTransition;
 import javafx.application.Application;
 import javafx.application.Platform;
 import javafx.scene.Scene;
@@ -31,8 +33,13 @@ public final class BedmarkApp extends Application {
     /** By then a person has begun to walk, and the start is not held up. */
     private static final Duration PROOF_DELAY = Duration.ofSeconds(20);
 
+    /** By then the first frame is drawn, and nobody can have opened a stop yet. */
+    private static final javafx.util.Duration FORMS_DELAY = javafx.util.Duration.millis(300);
+
     /** What the launcher hands over; the toolkit makes the application itself and takes no arguments but texts. */
-    private static Optional<Launch> launch = Optional.empty();
+    private static volatile Optional<Launch> launch = Optional.empty();
+    /** Made by the screen while the store was being opened. */
+    private static Optional<FirstScene> ready = Optional.empty();
 
     private Optional<Workplace> workplace = Optional.empty();
     private Optional<Shell> shell = Optional.empty();
@@ -41,15 +48,24 @@ public final class BedmarkApp extends Application {
     /**
      * What the window begins with.
      *
-     * @param store   opened already; nothing where it takes a passphrase
-     * @param site    the plant of that store
+     * @param begun   what is there already; nothing where the store takes a passphrase
      * @param folder  the store's
      * @param opening opens it with one
      * @param samples the folder with the demo plant
      * @param load    whether to load it at once
      */
-    private record Launch(Optional<Store> store, Optional<Site> site, Path folder,
-                          Function<Passphrase, Store> opening, Clock clock, Optional<Path> samples, boolean load) {
+    private record Launch(Optional<Begun> begun, Path folder, Function<Passphrase, Store> opening, Clock clock,
+                          Optional<Path> samples, boolean load) {
+    }
+
+    /** The workplace of an open store, how it asks for folders, and the round that goes on there. */
+    private record Begun(Workplace workplace, StageChoice choice, Optional<RoundModel> walked) {
+
+        static Begun at(Store store, Clock clock, Optional<Path> samples) {
+            StageChoice choice = new StageChoice();
+            Workplace workplace = new Workplace(store, clock, Platform::runLater, choice, samples);
+            return new Begun(workplace, choice, Shell.goingOn(workplace));
+        }
     }
 
     /** The options that the app opens a store with. */
@@ -59,10 +75,12 @@ public final class BedmarkApp extends Application {
     }
 
     /**
-     * Starts the toolkit and lets it read the typeface while the caller opens a store, since neither needs the other.
-     * Where there is no display, {@link #open} says so.
+     * Starts the toolkit and lets it read the typeface and the style sheets while the caller opens a store, since neither
+     * needs the other. Where there is no display, {@link #open} says so.
+     *
+     * @param folder the store's; how the person likes the tablet lies there
      */
-    public static void prepare() {
+    public static void prepare(Path folder, Clock clock) {
         Thread preparing = new Thread(() -> {
             try {
                 Platform.startup(Typeface::load);
@@ -70,6 +88,12 @@ public final class BedmarkApp extends Application {
                 // Said again, and told to the person, when the window is to be opened.
                 return;
             }
+            Preferences preferences = new PreferencesFile(folder).read();
+            Platform.runLater(() -> {
+                if (launch.isEmpty()) {
+                    ready = Optional.of(FirstScene.ready(preferences, clock, WIDTH, HEIGHT));
+                }
+            });
         }, "prepare-toolkit");
         preparing.setDaemon(true);
         preparing.start();
@@ -81,7 +105,7 @@ public final class BedmarkApp extends Application {
      * @return false where there is no display to open a window on
      */
     public static boolean open(Store store, Clock clock, Optional<Path> samples, boolean load) {
-        return launch(new Launch(Optional.of(store), Workplace.readSite(store), store.folder(), passphrase -> store,
+        return launch(new Launch(Optional.of(Begun.at(store, clock, samples)), store.folder(), passphrase -> store,
                 clock, samples, load));
     }
 
@@ -93,7 +117,7 @@ public final class BedmarkApp extends Application {
      */
     public static boolean unlock(Path folder, Function<Passphrase, Store> opening, Clock clock,
                                  Optional<Path> samples) {
-        return launch(new Launch(Optional.empty(), Optional.empty(), folder, opening, clock, samples, false));
+        return launch(new Launch(Optional.empty(), folder, opening, clock, samples, false));
     }
 
     private static boolean launch(Launch begin) {
@@ -110,7 +134,7 @@ public final class BedmarkApp extends Application {
     public void start(Stage stage) {
         Launch given = launch.orElseThrow();
         stage.setTitle("Bedmark");
-        given.store().ifPresentOrElse(store -> work(stage, given, store, given.site()), () -> ask(stage, given));
+        given.begun().ifPresentOrElse(begun -> work(stage, given, begun), () -> ask(stage, given));
         stage.show();
     }
 
@@ -118,21 +142,22 @@ public final class BedmarkApp extends Application {
     private void ask(Stage stage, Launch given) {
         Preferences preferences = new PreferencesFile(given.folder()).read();
         UnlockView view = new UnlockView(new Wording(new Words(preferences.locale()), preferences.units()),
-                new UnlockModel(given.opening(), Platform::runLater), store -> work(stage, given, store, Workplace.readSite(store)));
+                new UnlockModel(given.opening(), Platform::runLater),
+                store -> work(stage, given, Begun.at(store, given.clock(), given.samples())));
         Scene scene = new Scene(view, WIDTH, HEIGHT);
         Theme.apply(scene, preferences.night() ? Light.NIGHT : Light.DAY, Shell.density(preferences));
         stage.setScene(scene);
         view.focus();
     }
 
-    private void work(Stage stage, Launch given, Store store, Optional<Site> site) {
-        Workplace here = new Workplace(store, site, given.clock(), Platform::runLater, new StageChoice(stage),
-                given.samples());
+    private void work(Stage stage, Launch given, Begun begun) {
+        Workplace here = begun.workplace();
+        begun.choice().over(stage);
         here.proveAfter(PROOF_DELAY);
-        Shell opened = new Shell(here, WIDTH, HEIGHT);
+        Shell opened = new Shell(here, ready.orElseGet(() -> FirstScene.plain(WIDTH, HEIGHT)), begun.walked());
         workplace = Optional.of(here);
         shell = Optional.of(opened);
-        Diary noted = new Diary(store.folder(), given.clock());
+        Diary noted = new Diary(given.folder(), given.clock());
         noted.note(Happening.STORE_OPENED, Map.of());
         diary = Optional.of(noted);
         Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> noted.note(failure));
@@ -142,6 +167,9 @@ public final class BedmarkApp extends Application {
             opened.failed(failure);
         });
         stage.setScene(opened.scene());
+        PauseTransition drawn = new PauseTransition(FORMS_DELAY);
+        drawn.setOnFinished(event -> here.readForms());
+        drawn.play();
         if (given.load()) {
             opened.loadDemo();
         }

@@ -1,12 +1,6 @@
 package bedmark.screen;
 
-import bedmark.document.Refused;
-import bedmark.json.JsonReader;
-import bedmark.json.JsonWriter;
-import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.Optional;
 
 /**
@@ -16,7 +10,7 @@ import java.util.Optional;
 public final class PreferencesFile {
     private static final String NAME = "preferences.json";
 
-    private final Path file;
+    private final KeptFile file;
 
     /** @param store the store's folder */
     public PreferencesFile(Path store) {
@@ -30,7 +24,7 @@ public final class PreferencesFile {
      * @param name   of the file
      */
     public PreferencesFile(Path folder, String name) {
-        this.file = folder.resolve(name);
+        this.file = new KeptFile(folder.resolve(name));
     }
 
     /** What was kept; a file that is missing or damaged is as good as none. */
@@ -40,23 +34,11 @@ public final class PreferencesFile {
 
     /** What was kept, where anything was. */
     public Optional<Preferences> kept() {
-        try {
-            return Files.exists(file) ? Optional.of(Preferences.of(JsonReader.read(Files.readAllBytes(file)).root()))
-                    : Optional.empty();
-        } catch (IOException | Refused e) {
-            return Optional.empty();
-        }
+        return file.read(Preferences::of);
     }
 
     /** Keeps them; returns whether that went well. */
     public boolean write(Preferences preferences) {
-        Path next = file.resolveSibling(file.getFileName() + ".next");
-        try {
-            Files.write(next, JsonWriter.indented(preferences.document()));
-            Files.move(next, file, StandardCopyOption.REPLACE_EXISTING);
-            return true;
-        } catch (IOException e) {
-            return false;
-        }
+        return file.write(preferences.document());
     }
 }

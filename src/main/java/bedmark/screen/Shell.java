@@ -41,7 +41,7 @@ public final class Shell implements Navigator {
     private static final Duration CLOCK_TICK = Duration.seconds(20);
 
     private final Workplace workplace;
-    private final BorderPane root = new BorderPane();
+    private final BorderPane root;
     private final Scene scene;
     private final Timeline clock = new Timeline(new KeyFrame(CLOCK_TICK, event -> followClock()));
     private Supplier<Screen> current;
@@ -51,10 +51,16 @@ public final class Shell implements Navigator {
     private Optional<RoundModel> walked = Optional.empty();
     private boolean failing;
 
-    /** A window of that size; the start of a walk is shown first. */
+    /** A window of that size; the round that is being walked is shown first, else the start of a walk. */
     public Shell(Workplace workplace, double width, double height) {
+        this(workplace, FirstScene.plain(width, height), goingOn(workplace));
+    }
+
+    /** As above, in a scene that is there already, with what {@link #goingOn} found. */
+    Shell(Workplace workplace, FirstScene first, Optional<RoundModel> goingOn) {
         this.workplace = workplace;
-        this.scene = new Scene(root, width, height);
+        this.scene = first.scene();
+        this.root = first.root();
         dress();
         workplace.preferencesProperty().addListener((property, before, now) -> preferencesChanged(before, now));
         scene.widthProperty().addListener((property, before, now) -> turn());
@@ -67,7 +73,32 @@ public final class Shell implements Navigator {
         });
         clock.setCycleCount(Animation.INDEFINITE);
         clock.play();
-        toStart();
+        begin(goingOn);
+    }
+
+    private void begin(Optional<RoundModel> goingOn) {
+        try {
+            goingOn.ifPresentOrElse(this::showRound, this::toStart);
+        } catch (RuntimeException e) {
+            letGo();
+            workplace.report(e);
+            toStart();
+        }
+    }
+
+    /**
+     * The round that a program which ended in the midst of a walk goes on with. Touches no screen, so that it can be read
+     * before there is one.
+     */
+    static Optional<RoundModel> goingOn(Workplace workplace) {
+        try {
+            return workplace.siteProperty().get()
+                    .flatMap(site -> workplace.walkMemory().goingOn(site, workplace.preferences().person()))
+                    .map(round -> new RoundModel(workplace, round));
+        } catch (RuntimeException e) {
+            workplace.report(e);
+            return Optional.empty();
+        }
     }
 
     public Scene scene() {
@@ -215,6 +246,7 @@ public final class Shell implements Navigator {
     @Override
     public void toStart() {
         walked = Optional.empty();
+        workplace.walkMemory().end();
         StartModel model = new StartModel(workplace);
         show(() -> new StartView(workplace, model, this));
     }
@@ -226,11 +258,15 @@ public final class Shell implements Navigator {
 
     @Override
     public void toRound(RoundModel round) {
-        walked = Optional.of(round);
         round.reload();
-        show(() -> new RoundView(workplace, round, this));
+        showRound(round);
         // What was completed a moment ago may still be on its way to the store.
         workplace.scribe().afterwards(round::reload);
+    }
+
+    private void showRound(RoundModel round) {
+        walked = Optional.of(round);
+        show(() -> new RoundView(workplace, round, this));
     }
 
     @Override

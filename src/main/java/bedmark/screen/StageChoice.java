@@ -7,12 +7,22 @@ import javafx.stage.DirectoryChooser;
 import javafx.stage.FileChooser;
 import javafx.stage.Stage;
 
+<<<<<<< HEAD
 /** Asks by the dialogs of the machine, over one window. */
 public final class StageChoice implements FolderChoice {
     private final Stage stage;
 
     public StageChoice(Stage stage) {
         this.stage = stage;
+=======
+/** Asks by the dialogs of the machine, over one window; nothing is asked before that is there. */
+final class StageChoice implements FolderChoice {
+    private Stage stage;
+
+    /** From now on asks over that window. Called by the screen. */
+    void over(Stage window) {
+        stage = window;
+>>>>>>> start
     }
 
     @Override

@@ -30,6 +30,7 @@ public final class Workplace implements AutoCloseable {
     private final Optional<Path> samples;
     private final Scribe scribe;
     private final PreferencesFile preferencesFile;
+    private final WalkMemory walkMemory;
     private Optional<BackgroundProof> proof = Optional.empty();
     private final ExecutorService longWork = Executors.newSingleThreadExecutor(run -> {
         Thread thread = new Thread(run, "long-work");
@@ -48,12 +49,6 @@ public final class Workplace implements AutoCloseable {
      * @param samples      the folder with the demo plant, where there is one
      */
     public Workplace(Store store, Clock clock, Executor screen, FolderChoice folderChoice, Optional<Path> samples) {
-        this(store, readSite(store), clock, screen, folderChoice, samples);
-    }
-
-    /** As above, with the plant of the store, which somebody has read already. */
-    Workplace(Store store, Optional<Site> site, Clock clock, Executor screen, FolderChoice folderChoice,
-              Optional<Path> samples) {
         this.store = store;
         this.clock = clock;
         this.screen = screen;
@@ -61,8 +56,9 @@ public final class Workplace implements AutoCloseable {
         this.samples = samples;
         this.scribe = new Scribe(store, screen);
         this.preferencesFile = new PreferencesFile(store.folder());
+        this.walkMemory = new WalkMemory(store, clock);
         this.preferences = new SimpleObjectProperty<>(preferencesFile.read());
-        this.site = new ReadOnlyObjectWrapper<>(site);
+        this.site = new ReadOnlyObjectWrapper<>(store.register().map(Site::of));
         preferences.addListener((property, before, now) -> {
             preferencesFile.write(now);
             wording.set(wording(now));
@@ -74,11 +70,6 @@ public final class Workplace implements AutoCloseable {
         return new Wording(new Words(preferences.locale()), preferences.units(), preferences.chosenUnits());
     }
 
-    /** The plant of a store. */
-    static Optional<Site> readSite(Store store) {
-        return store.register().map(Site::of);
-    }
-
     /** Takes a register in. Runs beside the screen. */
     public void adopt(Act register) {
         store.append(preferences.get().person(), register);
@@ -87,7 +78,8 @@ public final class Workplace implements AutoCloseable {
 
     /** Reads the plant anew, where it may have changed. Runs beside the screen. */
     public void reread() {
-        Optional<Site> read = readSite(store);
+        Optional<Site> read = store.register().map(Site::of);
+        read.ifPresent(Site::readForms);
         screen.execute(() -> site.set(read));
     }
 
@@ -101,6 +93,11 @@ public final class Workplace implements AutoCloseable {
 
     public Scribe scribe() {
         return scribe;
+    }
+
+    /** Which walk a program that starts anew goes on with. */
+    public WalkMemory walkMemory() {
+        return walkMemory;
     }
 
     public FolderChoice folderChoice() {
@@ -147,6 +144,17 @@ public final class Workplace implements AutoCloseable {
     /** Shows a failure of the program itself in the head of the screen, in words. */
     void report(Throwable failure) {
         scribe.report(Defect.in("", FAILED, failure.getClass().getSimpleName()));
+    }
+
+    /** Reads the forms beside the screen, before a stop is opened, and says in the head where one can't be read. */
+    void readForms() {
+        site.get().ifPresent(plant -> longWork.execute(() -> {
+            try {
+                plant.readForms();
+            } catch (Refused e) {
+                screen.execute(() -> scribe.report(e.defect()));
+            }
+        }));
     }
 
     /** Proves the store behind everything else, and says in the head of the screen where something is wrong. */

@@ -76,5 +76,6 @@ create table survey (
 );
 create index survey_round on survey (round);
 create index survey_transfer on survey (transfer, finished);
+create index survey_newest on survey (transfer, first_no desc);
 create index survey_state on survey (state);
 create index survey_supersedes on survey (supersedes);

@@ -1,11 +1,18 @@
 package bedmark.launcher;
 
+import bedmark.command.BedmarkCommand;
+import bedmark.command.Surroundings;
+import bedmark.screen.BedmarkApp;
 import bedmark.screen.TabletApp;
+import bedmark.words.Words;
 import java.io.IOException;
+import java.io.PrintWriter;
+import java.io.StringWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Comparator;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.scene.input.KeyCode;
@@ -20,8 +27,12 @@ public final class Rehearsal {
 
     public static void main(String... arguments) throws Exception {
         Path folder = Files.createTempDirectory("bedmark-rehearsal");
-        try (TabletApp app = new TabletApp(folder.resolve("store"), Optional.of(Path.of("sample-surveys")),
-                Files.createDirectory(folder.resolve("stick")), Clock.systemUTC(), 1280, 800)) {
+        Path store = folder.resolve("store");
+        Path stick = Files.createDirectory(folder.resolve("stick"));
+        Optional<Path> samples = Optional.of(Path.of("sample-surveys"));
+        Clock clock = Clock.systemUTC();
+        begin(store, clock);
+        try (TabletApp app = new TabletApp(store, samples, stick, clock, 1280, 800)) {
             app.click("load-demo");
             app.until(() -> app.has("person"));
             app.click("person");
@@ -36,10 +47,23 @@ public final class Rehearsal {
             app.click("foot-round");
             app.click("to-queue");
             app.settle();
-        } finally {
-            delete(folder);
         }
+        // Once more, in the midst of the walk.
+        try (TabletApp app = new TabletApp(store, samples, stick, clock, 1280, 800)) {
+            app.until(() -> app.has("search"));
+        }
+        delete(folder);
         System.exit(0);
+    }
+
+    /** As the program begins: the command, and the toolkit that is made ready. */
+    private static void begin(Path store, Clock clock) {
+        StringWriter said = new StringWriter();
+        BedmarkCommand.run(new Surroundings(new PrintWriter(said), new PrintWriter(said), Optional.empty(), clock,
+                new Words(Locale.ENGLISH), (folder, samples, load) -> {
+                    BedmarkApp.prepare(store, clock);
+                    return true;
+                }));
     }
 
     private static void delete(Path folder) throws IOException {

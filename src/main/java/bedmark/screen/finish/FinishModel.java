@@ -148,6 +148,7 @@ public final class FinishModel {
     public void finish(Runnable then) {
         String person = workplace.preferences().person();
         workplace.scribe().save(person, new Act.WalkFinished(round.round().id()), entry -> {
+            workplace.walkMemory().end();
             round.reload();
             List<UUID> completed = round.rowsProperty().get().stream().flatMap(row -> row.survey().stream())
                     .filter(line -> line.state() == QueueState.COMPLETED).map(SurveyLine::id).toList();

@@ -77,7 +77,7 @@ public final class OfficeShell {
 
     private void dress() {
         Preferences preferences = desk.preferences();
-        Theme.apply(scene, preferences.night() ? Light.NIGHT : Light.DAY,
+        Theme.applyOffice(scene, preferences.night() ? Light.NIGHT : Light.DAY,
                 new Density(preferences.dpi(), Hand.BARE));
     }
 

@@ -37,6 +37,8 @@ import javafx.beans.property.StringProperty;
 public final class RoundModel {
     private final Workplace workplace;
     private final Round round;
+    /** How many actions a finished survey left open, which never changes. */
+    private final Map<UUID, Integer> leftOpen = new HashMap<>();
     private final StringProperty search = new SimpleStringProperty("");
     private final BooleanProperty waitingOnly = new SimpleBooleanProperty();
     private final ReadOnlyObjectWrapper<List<RoundRow>> rows = new ReadOnlyObjectWrapper<>(List.of());
@@ -100,11 +102,15 @@ public final class RoundModel {
 
     /** What the office noted there and knows to be open, and what the last survey left open. */
     private int notes(Register.Transfer transfer, Optional<SurveyLine> last) {
-        long left = last.flatMap(line -> workplace.store().history(line.id())).stream()
+        int left = last.map(line -> leftOpen.computeIfAbsent(line.id(), this::leftOpen)).orElse(0);
+        return transfer.document().series("officeNotes").size() + left
+                + PlannedAction.of(transfer.document(), "openActions").size();
+    }
+
+    private int leftOpen(UUID survey) {
+        return (int) workplace.store().history(survey).stream()
                 .flatMap(history -> PlannedAction.of(history.survey().document(), PlannedAction.KEY).stream())
                 .filter(action -> !action.done()).count();
-        return transfer.document().series("officeNotes").size() + (int) left
-                + PlannedAction.of(transfer.document(), "openActions").size();
     }
 
     /** What other rounds found at a transfer point last. */

@@ -13,6 +13,7 @@ import bedmark.screen.part.Named;
 import bedmark.screen.part.Plate;
 import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.SectionHeader;
+import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Icon;
 import bedmark.screen.theme.IconView;
@@ -20,13 +21,16 @@ import bedmark.screen.theme.LevelGlyph;
 import bedmark.screen.theme.LevelShape;
 import bedmark.survey.InspectionStatus;
 import bedmark.wording.Wording;
+import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import javafx.application.Platform;
 import javafx.geometry.Pos;
+import javafx.scene.Node;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
@@ -43,6 +47,11 @@ import org.controlsfx.control.textfield.CustomTextField;
 
 /** The round: its stops in walking order, grouped by area; beside them what was found so far. */
 public final class RoundView extends SidedScreen {
+    /** How many stops before and behind the next one are built before the screen is first drawn. */
+    private static final int BEFORE = 1;
+    private static final int AHEAD = 9;
+    private static final int AT_A_TIME = 4;
+
     private final Workplace workplace;
     private final RoundModel model;
     private final Navigator navigator;
@@ -51,6 +60,9 @@ public final class RoundView extends SidedScreen {
     private final VBox stops = new VBox();
     private final ScrollPane scroll = new ScrollPane(list);
     private boolean portrait;
+    /** The stops that are in the list. */
+    private int from;
+    private int to;
     private final CustomTextField search = new CustomTextField();
 
     public RoundView(Workplace workplace, RoundModel model, Navigator navigator) {
@@ -115,21 +127,60 @@ public final class RoundView extends SidedScreen {
         return search;
     }
 
+    /** All stops; the first time those in sight, and the others once they are drawn. */
     private void layOut() {
-        list.getChildren().clear();
-        String area = null;
-        for (RoundRow row : model.shownProperty().get()) {
-            if (!row.area().equals(area)) {
-                area = row.area();
-                list.getChildren().add(new SectionHeader(area));
+        boolean first = list.getChildren().isEmpty();
+        List<RoundRow> rows = model.shownProperty().get();
+        int next = first ? model.nextToDo("").map(rows::indexOf).orElse(0) : 0;
+        from = first ? Math.max(0, next - BEFORE) : 0;
+        to = first ? Math.min(rows.size(), Math.max(0, next) + AHEAD) : rows.size();
+        list.getChildren().setAll(lines(rows, from, to));
+        whole();
+    }
+
+    /** The stops of a range, each area with its title before it. */
+    private List<Node> lines(List<RoundRow> rows, int first, int end) {
+        List<Node> lines = new ArrayList<>();
+        for (int i = first; i < end; i++) {
+            if (i == 0 || !rows.get(i).area().equals(rows.get(i - 1).area())) {
+                lines.add(new SectionHeader(rows.get(i).area()));
             }
-            list.getChildren().add(stop(row));
+            lines.add(stop(rows.get(i)));
         }
-        if (list.getChildren().isEmpty()) {
-            Label nothing = new Label(wording.text(model.rowsProperty().get().isEmpty() ? "first.no-stops"
-                    : "screen.round.nothing-found"));
-            nothing.setWrapText(true);
-            list.getChildren().add(nothing);
+        return lines;
+    }
+
+    /** Takes more stops into the list: those behind it, then those before it; a few at a time, so that presses get their turn. */
+    private void fillSome() {
+        List<RoundRow> rows = model.shownProperty().get();
+        if (list.getScene() == null || from == 0 && to == rows.size()) {
+            return;
+        }
+        if (to < rows.size()) {
+            int end = Math.min(rows.size(), to + AT_A_TIME);
+            list.getChildren().addAll(lines(rows, to, end));
+            to = end;
+        } else {
+            int start = Math.max(0, from - AT_A_TIME);
+            list.getChildren().addAll(0, lines(rows, start, from));
+            from = start;
+        }
+        whole();
+        scroll.applyCss();
+        scroll.layout();
+        revealNext();
+        Platform.runLater(this::fillSome);
+    }
+
+    /** Once all stops are in the list, it is told what else there is, or that there are none. */
+    private void whole() {
+        List<RoundRow> rows = model.shownProperty().get();
+        if (from > 0 || to < rows.size()) {
+            return;
+        }
+        if (rows.isEmpty()) {
+            list.getChildren().add(Texts.wrapped(wording.text(model.rowsProperty().get().isEmpty() ? "first.no-stops"
+                    : "screen.round.nothing-found")));
         }
         proposals();
     }
@@ -391,6 +442,7 @@ public final class RoundView extends SidedScreen {
     public void shown() {
         revealNext();
         body.requestFocus();
+        Platform.runLater(this::fillSome);
     }
 
     @Override

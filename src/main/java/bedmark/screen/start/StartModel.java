@@ -129,11 +129,16 @@ public final class StartModel {
 
     /** Starts the walk, or goes on with it. */
     public void start(Runnable then) {
-        if (goesOn()) {
+        Round chosen = round.get();
+        Runnable setOut = () -> {
+            workplace.walkMemory().begin(chosen, person.get().strip());
             then.run();
+        };
+        if (goesOn()) {
+            setOut.run();
             return;
         }
-        workplace.scribe().save(person.get(), new Act.WalkStarted(round.get().id()), entry -> then.run());
+        workplace.scribe().save(person.get().strip(), new Act.WalkStarted(chosen.id()), entry -> setOut.run());
     }
 
     /** Loads the demo plant with its past rounds and the one under way. */

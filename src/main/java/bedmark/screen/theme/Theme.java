@@ -15,18 +15,32 @@ import javafx.scene.Scene;
 public final class Theme {
     /** The sheets that hold the look, in their order; lengths in them are those of the glass. */
     static final List<String> SHEETS = List.of("theme.css", "parts.css", "controls.css", "screens.css", "walk.css",
+<<<<<<< HEAD
             "arrival.css", "office.css");
+=======
+            "office.css");
+    private static final List<String> OF_TABLET = SHEETS.subList(0, SHEETS.size() - 1);
+>>>>>>> start
 
     private Theme() {
     }
 
     /**
-     * Dresses a scene, or dresses it anew; its style sheets are replaced. Pop-ups that it opens take them over, so the
+     * Dresses a scene of the tablet, or dresses it anew; its style sheets are replaced. Pop-ups that it opens take them over, so the
      * light and the sizes are written into the sheets and do not hang on the scene's own root.
      */
     public static void apply(Scene scene, Light light, Density density) {
+        apply(scene, light, density, OF_TABLET);
+    }
+
+    /** The same for a scene of the office, which has rooms that no tablet has. */
+    public static void applyOffice(Scene scene, Light light, Density density) {
+        apply(scene, light, density, SHEETS);
+    }
+
+    private static void apply(Scene scene, Light light, Density density, List<String> names) {
         Typeface.load();
-        List<String> sheets = Stream.concat(Stream.of(tokens(light)), SHEETS.stream()
+        List<String> sheets = Stream.concat(Stream.of(tokens(light)), names.stream()
                 .map(name -> density.transcribe(read(name)))).map(Theme::asAddress).toList();
         if (!scene.getStylesheets().equals(sheets)) {
             scene.getStylesheets().setAll(sheets);

@@ -57,7 +57,7 @@ final class Effects implements Books.Effect {
 
     /** Reads a pack of the shelf once more. */
     private Intake read(String sha256) {
-        ReadPack pack = new PackReader(limits, BundleReader::read).open(shelf.file(sha256), Progress.NONE);
+        ReadPack pack = new PackReader(limits, BundleReader::readUnjudged).open(shelf.file(sha256), Progress.NONE);
         return Intake.of(pack.bundle(), sha256);
     }
 

@@ -74,7 +74,7 @@ final class Receiving {
         Optional<PackShelf.Laid> laid = Optional.empty();
         try {
             laid = Optional.of(shelf.lay(file));
-            ReadPack pack = new PackReader(options.limits(), BundleReader::read).open(laid.get().part(),
+            ReadPack pack = new PackReader(options.limits(), BundleReader::readUnjudged).open(laid.get().part(),
                     Progress.NONE);
             return new Proved(file, laid, Optional.of(pack), Optional.of(Intake.of(pack.bundle(),
                     laid.get().sha256())), Optional.empty());

@@ -1,0 +1,101 @@
+package bedmark.json;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import bedmark.document.Branch;
+import bedmark.document.Node;
+import bedmark.document.Refused;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Random;
+import java.util.function.Function;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** A bundle whose assessments are read over: the rest is the same, and so is everything that is refused. */
+class UnjudgedBundleTest {
+    private static final Path SAMPLE = Path.of("sample-surveys", "round-under-way.json");
+    private static final int CHANGES = 6000;
+
+    private static String assessed(String assessment) {
+        return "{\"format\":\"bedmark.bundle\",\"version\":1,\"plant\":{\"conveyors\":[{\"id\":\"c\"}],\"transfers\":"
+                + "[{\"id\":\"t\",\"conveyor\":\"c\"}]},\"surveys\":[{\"id\":\"0b2f6c1e-6f0e-4f6f-9a70-0d0e3f8f1a03\","
+                + "\"transfer\":\"t\",\"assessment\":" + assessment + ",\"observations\":{\"assessment\":{\"own\":1}}}],"
+                + "\"assessment\":{\"kept\":[1]}}";
+    }
+
+    private static String told(Function<byte[], Object> reading, byte[] text) {
+        try {
+            return String.valueOf(reading.apply(text));
+        } catch (Refused e) {
+            return e.defect().toString();
+        }
+    }
+
+    private static Object unjudged(Branch bundle) {
+        List<Node> surveys = bundle.branches("surveys").stream().map(survey -> survey.has("assessment")
+                ? (Node) survey.with("assessment", Branch.EMPTY) : survey).toList();
+        return bundle.with("surveys", new Node.Series(surveys));
+    }
+
+    @Test
+    void everythingButTheAssessmentsIsKept() {
+        byte[] text = assessed("{\"a\":[1,{\"b\":\"\\u00e9\\ud83d\\ude00\",\"c\":null}],\"d\":1e99,\"e\":{},\"f\":true}")
+                .getBytes(StandardCharsets.UTF_8);
+        assertEquals(unjudged(BundleReader.read(text).document()), BundleReader.readUnjudged(text).document());
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"{\"a\":1,\"a\":2}", "{\"a\":[{\"b\":1,\"c\":{\"b\":1},\"b\":1}]}", "{\"a\":1e100}",
+        "{\"a\":\"\\ud800\"}", "{\"\\udc00\":1}", "{\"a\":NaN}", "{\"a\":01}", "{\"a\":[1,]}", "{\"a\":\"\t\"}",
+        "{\"a\":tru}", "[]", "1", "{\"a\":1e999999999}", "{\"a\"}", "{\"a\":{}"})
+    void whatIsRefusedElsewhereIsRefusedInAnAssessmentToo(String assessment) {
+        byte[] text = assessed(assessment).getBytes(StandardCharsets.UTF_8);
+        assertEquals(assertThrows(Refused.class, () -> BundleReader.read(text)).defect(),
+                assertThrows(Refused.class, () -> BundleReader.readUnjudged(text)).defect());
+    }
+
+    @Test
+    void aKeyThatStandsTwiceIsFoundAmongMany() {
+        for (int keys : List.of(2, 24, 25, 26, 300)) {
+            StringBuilder many = new StringBuilder("{");
+            for (int i = 0; i < keys; i++) {
+                many.append("\"k").append(i).append("\":{\"k0\":").append(i).append("},");
+            }
+            assertEquals(1, BundleReader.readUnjudged(assessed(many + "\"last\":0}")
+                    .getBytes(StandardCharsets.UTF_8)).surveys().size());
+            for (int twice : List.of(0, keys / 2, keys - 1)) {
+                byte[] text = assessed(many + "\"k" + twice + "\":0}").getBytes(StandardCharsets.UTF_8);
+                assertThrows(Refused.class, () -> BundleReader.readUnjudged(text));
+            }
+        }
+    }
+
+    /** Bytes of a real bundle changed, dropped and doubled: both readings say the same of each. */
+    @Test
+    void damagedTextsAreToldAlike() throws IOException {
+        byte[] sound = JsonWriter.compact(JsonReader.read(Files.readAllBytes(SAMPLE)).root());
+        Random random = new Random(5);
+        byte[] signs = "{}[]\",:0123456789eE+-.\\u \n\t\u00e9\ud83d\ude00ax".getBytes(StandardCharsets.UTF_8);
+        int refused = 0;
+        for (int i = 0; i < CHANGES; i++) {
+            int at = random.nextInt(sound.length);
+            byte[] text = sound.clone();
+            switch (random.nextInt(4)) {
+                case 0 -> text[at] = (byte) random.nextInt(256);
+                case 1 -> System.arraycopy(sound, at, text, Math.max(0, at - 1), sound.length - at);
+                default -> text[at] = signs[random.nextInt(signs.length)];
+            }
+            String whole = told(bytes -> unjudged(BundleReader.read(bytes).document()), text);
+            assertEquals(whole, told(bytes -> BundleReader.readUnjudged(bytes).document(), text));
+            refused += whole.startsWith("Defect") ? 1 : 0;
+        }
+        assertTrue(refused > CHANGES / 10, "some were refused: " + refused);
+    }
+}

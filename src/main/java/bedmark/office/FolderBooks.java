@@ -12,6 +12,7 @@ import bedmark.journal.Journal;
 import bedmark.journal.JournalProof;
 import bedmark.journal.JournalVisitor;
 import bedmark.journal.Mark;
+import bedmark.journal.NotSaved;
 import bedmark.journal.Place;
 import bedmark.journal.Replay;
 import bedmark.json.EntryCodec;
@@ -25,8 +26,8 @@ import java.util.HexFormat;
 import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
-import java.util.function.BooleanSupplier;
 import java.util.function.Supplier;
+import java.util.stream.IntStream;
 
 /** An office of its own in a folder: the journal is the truth, the tables are made anew from it where they fail. */
 final class FolderBooks implements Books {
@@ -148,7 +149,7 @@ final class FolderBooks implements Books {
                 return;
             }
             try {
-                take(entry, new Mark(identity, sequence, place), Optional.empty());
+                take(List.of(new Done(entry, Optional.empty())), new Mark(identity, sequence, place));
             } catch (Refused e) {
                 // A pack that can no longer be read: what it brought is missing, and everything else is not.
                 found.add(e.defect());
@@ -157,10 +158,11 @@ final class FolderBooks implements Books {
         }
     }
 
-    private void take(Entry entry, Mark mark, Optional<Intake> intake) {
+    /** @param mark of the last of them */
+    private void take(List<Done> deeds, Mark mark) {
         tables().whole(() -> {
-            tables().add(row(entry));
-            effect.of(tables(), entry, intake);
+            deeds.forEach(done -> tables().add(row(done.entry())));
+            effect.of(tables(), deeds);
             tables().set(MARK, write(mark));
             return true;
         });
@@ -214,19 +216,45 @@ final class FolderBooks implements Books {
     }
 
     @Override
-    public Optional<Entry> keep(BooleanSupplier needless, Deed deed) {
-        if (ask(needless::getAsBoolean)) {
-            return Optional.empty();
-        }
-        Journal.Saved saved = journal.orElseThrow().append(OffsetDateTime.now(options.clock()), deed.person(), device,
-                new Act.OfficeActed(deed.deed()));
-        Mark mark = new Mark(journal.orElseThrow().identity(), saved.entry().sequence(), saved.place());
+    public List<Optional<Entry>> keep(List<Deed> deeds) {
+        List<Boolean> needless = ask(() -> deeds.stream().map(deed -> effect.needless(tables(), deed)).toList());
+        effect.prepare(IntStream.range(0, deeds.size()).filter(i -> !needless.get(i)).mapToObj(deeds::get).toList());
+        List<Optional<Entry>> kept = new ArrayList<>();
+        List<Done> done = new ArrayList<>();
+        Optional<Place> last = Optional.empty();
         try {
-            take(saved.entry(), mark, deed.intake());
+            for (int i = 0; i < deeds.size(); i++) {
+                if (needless.get(i)) {
+                    kept.add(Optional.empty());
+                    continue;
+                }
+                Journal.Saved saved = append(deeds.get(i));
+                kept.add(Optional.of(saved.entry()));
+                done.add(new Done(saved.entry(), deeds.get(i).pack().map(Pack::intake)));
+                last = Optional.of(saved.place());
+            }
+        } catch (NotSaved e) {
+            // Those before it are in the journal, and so is nothing of those after it.
+            if (kept.isEmpty()) {
+                throw e;
+            }
+        }
+        last.ifPresent(place -> tell(done, place));
+        return kept;
+    }
+
+    private Journal.Saved append(Deed deed) {
+        return journal.orElseThrow().append(OffsetDateTime.now(options.clock()), deed.person(), device,
+                new Act.OfficeActed(deed.deed()));
+    }
+
+    /** Tells the tables what the journal holds already. */
+    private void tell(List<Done> done, Place last) {
+        try {
+            take(done, new Mark(journal.orElseThrow().identity(), done.get(done.size() - 1).entry().sequence(), last));
         } catch (OfficeBroken e) {
             rebuild();
         }
-        return Optional.of(saved.entry());
     }
 
     @Override

@@ -3,7 +3,7 @@ package bedmark.json;
 import bedmark.document.Branch;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.time.DateTimeException;
-import java.time.OffsetDateTime;
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.Iterator;
@@ -19,10 +19,14 @@ import java.util.regex.Pattern;
 final class QuickCheck {
     private static final Pattern UUID = Pattern.compile(
             "[0-9a-fA-F]{8}-[0-9a-fA-F]{4}-[0-9a-fA-F]{4}-[0-9a-fA-F]{4}-[0-9a-fA-F]{12}");
-    private static final Pattern MOMENT = Pattern.compile("[0-9]{4}-[0-9]{2}-[0-9]{2}T[0-9]{2}:[0-9]{2}:[0-5][0-9]"
-            + "(\\.[0-9]{1,9})?(Z|\\+(0[0-9]|1[0-4]):[0-5][0-9]|-(0[1-9]|1[0-2]):[0-5][0-9])");
-    /** Where a line ends inside of a text, patterns mean different things to different programs. */
-    private static final Pattern ONE_LINE = Pattern.compile("[^\\n\\r\\u0085\\u2028\\u2029]*");
+    private static final Pattern MOMENT = Pattern.compile("[1-9][0-9]{3}-(0[1-9]|1[0-2])-(0[1-9]|[12][0-9]|3[01])"
+            + "T([01][0-9]|2[0-3]):[0-5][0-9]:[0-5][0-9](\\.[0-9]{1,9})?"
+            + "(Z|\\+(0[0-9]|1[0-4]):[0-5][0-9]|-(0[1-9]|1[0-2]):[0-5][0-9])");
+    private static final int DAY_AT = 8;
+    private static final int DAY_END = 10;
+    /** Every month has so many days. */
+    private static final String SURE_DAY = "28";
+    private static final String LINE_ENDS = "\n\r\u0085\u2028\u2029";
 
     private final JsonNode schema;
     private final Map<String, QuickRule> references = new HashMap<>();
@@ -104,7 +108,17 @@ final class QuickCheck {
 
     private static QuickRule pattern(String asked) {
         Predicate<String> found = Pattern.compile(asked).asPredicate();
-        return QuickRule.text(text -> ONE_LINE.matcher(text).matches() && found.test(text));
+        return QuickRule.text(text -> isOneLine(text) && found.test(text));
+    }
+
+    /** Where a line ends inside of a text, patterns mean different things to different programs. */
+    private static boolean isOneLine(String text) {
+        for (int i = 0; i < text.length(); i++) {
+            if (LINE_ENDS.indexOf(text.charAt(i)) >= 0) {
+                return false;
+            }
+        }
+        return true;
     }
 
     private static QuickRule format(String asked) {
@@ -116,14 +130,16 @@ final class QuickCheck {
     }
 
     private static boolean isMoment(String text) {
-        if (!MOMENT.matcher(text).matches()) {
-            return false;
-        }
+        return MOMENT.matcher(text).matches()
+                && (text.substring(DAY_AT, DAY_END).compareTo(SURE_DAY) <= 0 || isDay(text.substring(0, DAY_END)));
+    }
+
+    private static boolean isDay(String text) {
         try {
-            OffsetDateTime.parse(text);
+            LocalDate.parse(text);
             return true;
         } catch (DateTimeException e) {
-            // The validator says so too, or knows better.
+            // The validator says so too.
             return false;
         }
     }

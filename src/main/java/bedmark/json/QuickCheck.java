@@ -13,8 +13,8 @@ import java.util.function.Predicate;
 import java.util.regex.Pattern;
 
 /**
- * Tells at a glance that a schema accepts a document, which most documents are. It knows the keywords that the published
- * schemas use and is sure of nothing else; whatever it is not sure of the validator says, with its reasons.
+ * Tells at a glance that a schema accepts a document, as it does most. It knows the keywords that the published schemas
+ * use and is sure of nothing else; whatever it is not sure of the validator says, with its reasons.
  */
 final class QuickCheck {
     private static final Pattern UUID = Pattern.compile(

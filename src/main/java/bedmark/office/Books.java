@@ -43,8 +43,8 @@ interface Books extends AutoCloseable {
     }
 
     /**
-     * Does the first of some deeds, and as many of those that follow as go together with it: when this returns, they are
-     * on the medium and in the tables. Each is whole or was not done, whenever the power is cut.
+     * Does the first of some deeds, and as many of those that follow as go together with it: when this returns, they
+     * are on the medium and in the tables. Each is whole or was not done, whenever the power is cut.
      *
      * @param deeds at least one, none of which makes another one needless
      * @return what came of them, fewer than there are deeds where some are left; nothing for one that was needless

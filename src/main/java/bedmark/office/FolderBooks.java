@@ -5,7 +5,6 @@ import bedmark.document.Refused;
 import bedmark.index.office.DeedRow;
 import bedmark.index.office.OfficeBroken;
 import bedmark.index.office.OfficeTables;
-import bedmark.journal.Digest;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
 import bedmark.journal.Journal;
@@ -22,7 +21,6 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
-import java.util.HexFormat;
 import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
@@ -79,7 +77,7 @@ final class FolderBooks implements Books {
         Optional<Mark> mark = Optional.empty();
         try {
             tables = Optional.of(OfficeTables.of(index));
-            mark = tables().setting(MARK).map(FolderBooks::readMark);
+            mark = tables().setting(MARK).map(MarkText::read);
         } catch (OfficeBroken | IllegalArgumentException e) {
             rebuilt = true;
             drop();
@@ -163,7 +161,7 @@ final class FolderBooks implements Books {
         tables().whole(() -> {
             deeds.forEach(done -> tables().add(row(done.entry())));
             effect.of(tables(), deeds);
-            tables().set(MARK, write(mark));
+            tables().set(MARK, MarkText.write(mark));
             return true;
         });
     }
@@ -171,7 +169,7 @@ final class FolderBooks implements Books {
     private void note(Entry entry, Mark mark) {
         tables().whole(() -> {
             tables().add(row(entry));
-            tables().set(MARK, write(mark));
+            tables().set(MARK, MarkText.write(mark));
             return true;
         });
     }
@@ -179,23 +177,6 @@ final class FolderBooks implements Books {
     static DeedRow row(Entry entry) {
         return new DeedRow(entry.sequence(), entry.at().toString(), entry.person(), entry.device(),
                 entry.act().code(), EntryCodec.write(entry));
-    }
-
-    private static String write(Mark mark) {
-        Place place = mark.place();
-        return String.join(" ", mark.journal().toString(), Long.toString(mark.sequence()),
-                Integer.toString(place.segment()), Long.toString(place.offset()), Integer.toString(place.length()),
-                place.hash().hex());
-    }
-
-    private static Mark readMark(String text) {
-        String[] parts = text.split(" ");
-        if (parts.length != 6) {
-            throw new IllegalArgumentException("no mark: " + text);
-        }
-        return new Mark(UUID.fromString(parts[0]), Long.parseLong(parts[1]), new Place(Integer.parseInt(parts[2]),
-                Long.parseLong(parts[3]), Integer.parseInt(parts[4]),
-                Digest.ofBytes(HexFormat.of().parseHex(parts[5]))));
     }
 
     private void drop() throws IOException {

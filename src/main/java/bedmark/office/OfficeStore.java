@@ -194,8 +194,8 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     /**
-     * Takes packs in, one after the other; each whole or not at all. Some small ones are brought onto the medium and into
-     * the tables together, while the next ones are proved. A person may stop it between two of them.
+     * Takes packs in, one after the other; each whole or not at all. Some small ones are brought onto the medium and
+     * into the tables together, while the next ones are proved. A person may stop it between two of them.
      *
      * @param person   who receives
      * @param progress told of the packs, and asked whether to stop

@@ -80,7 +80,8 @@ class QuickCheckTest {
     @ParameterizedTest
     @ValueSource(strings = {"{\"properties\":{\"a\":{\"oneOf\":[{\"type\":\"string\"}]}}}",
         "{\"additionalProperties\":false}", "{\"properties\":{\"a\":false}}",
-        "{\"properties\":{\"a\":{\"$ref\":\"urn:elsewhere\"}}}", "{\"if\":{\"type\":\"object\"},\"then\":true,\"else\":true}"})
+        "{\"properties\":{\"a\":{\"$ref\":\"urn:elsewhere\"}}}",
+        "{\"if\":{\"type\":\"object\"},\"then\":true,\"else\":true}"})
     void whatIsNotKnownIsLeftToTheValidator(String schema) throws IOException {
         Branch document = Branch.EMPTY.with("a", "b");
         assertEquals(false, new QuickCheck(new ObjectMapper().readTree(schema)).accepts(document));

@@ -35,8 +35,8 @@ class UnjudgedBundleTest {
     };
 
     private static String assessed(String assessment) {
-        return "{\"format\":\"bedmark.bundle\",\"version\":1,\"plant\":{\"conveyors\":[{\"id\":\"c\"}],\"transfers\":"
-                + "[{\"id\":\"t\",\"conveyor\":\"c\"}]},\"surveys\":[{\"id\":\"0b2f6c1e-6f0e-4f6f-9a70-0d0e3f8f1a03\","
+        return "{\"format\":\"bedmark.bundle\",\"version\":1,\"plant\":{\"conveyors\":[{\"id\":\"c\"}],"
+                + "\"transfers\":[{\"id\":\"t\",\"conveyor\":\"c\"}]},\"surveys\":[{\"id\":\"0b2f6c1e-6f0e-4f6f-9a70-0d0e3f8f1a03\","
                 + "\"transfer\":\"t\",\"assessment\":" + assessment + ",\"observations\":{\"assessment\":{\"own\":1}}}],"
                 + "\"assessment\":{\"kept\":[1]}}";
     }
@@ -57,8 +57,8 @@ class UnjudgedBundleTest {
 
     @Test
     void everythingButTheAssessmentsIsKept() {
-        byte[] text = assessed("{\"a\":[1,{\"b\":\"\\u00e9\\ud83d\\ude00\",\"c\":null}],\"d\":1e99,\"e\":{},\"f\":true}")
-                .getBytes(StandardCharsets.UTF_8);
+        byte[] text = assessed("{\"a\":[1,{\"b\":\"\\u00e9\\ud83d\\ude00\",\"c\":null}],\"d\":1e99,\"e\":{},"
+                + "\"f\":true}").getBytes(StandardCharsets.UTF_8);
         assertEquals(unjudged(BundleReader.read(text).document()), BundleReader.readUnjudged(text).document());
     }
 
@@ -88,7 +88,7 @@ class UnjudgedBundleTest {
         }
     }
 
-    /** One survey of a real bundle, its bytes changed, dropped and doubled: every way of reading says the same of each. */
+    /** One survey of a real bundle, its bytes changed, dropped and doubled: all ways of reading say the same of each. */
     @Test
     void damagedTextsAreToldAlike() throws IOException {
         Branch bundle = JsonReader.read(Files.readAllBytes(SAMPLE)).root();

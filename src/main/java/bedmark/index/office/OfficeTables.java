@@ -259,7 +259,8 @@ public final class OfficeTables implements AutoCloseable {
     }
 
     private void stale(Collection<String> drives) {
-        link.rows("select z.zone, z.judged" + WANTED + "survey s on s.drive = wanted join zone z on z.latest = s.digest",
+        link.rows("select z.zone, z.judged" + WANTED
+                + "survey s on s.drive = wanted join zone z on z.latest = s.digest",
                 row -> row.getBoolean(2) ? Optional.of(row.getString(1)) : Optional.<String>empty(),
                 link.texts(drives)).stream().flatMap(Optional::stream).forEach(zone -> link.batch(STALE, zone));
         link.runBatch(STALE);

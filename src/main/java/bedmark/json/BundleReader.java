@@ -9,6 +9,7 @@ import bedmark.survey.Bundle;
 import bedmark.survey.Register;
 import bedmark.survey.Round;
 import bedmark.survey.Survey;
+import com.fasterxml.jackson.core.JsonStreamContext;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -37,7 +38,25 @@ public final class BundleReader {
      * @throws Refused where it is none, of another version, or holds something impossible
      */
     public static Bundle read(byte[] bytes) {
-        Document document = JsonReader.read(bytes);
+        return bundle(JsonReader.read(bytes));
+    }
+
+    /**
+     * As {@link #read(byte[])}, for whoever judges anew: assessments are read as strictly, and what they hold is not
+     * kept. They are most of a bundle.
+     */
+    public static Bundle readUnjudged(byte[] bytes) {
+        return bundle(JsonReader.read(bytes, BundleReader::isAssessment));
+    }
+
+    private static boolean isAssessment(JsonStreamContext object) {
+        JsonStreamContext survey = object.getParent();
+        return "assessment".equals(survey.getCurrentName()) && survey.getParent().inArray()
+                && "surveys".equals(survey.getParent().getParent().getCurrentName())
+                && survey.getParent().getParent().getParent().inRoot();
+    }
+
+    private static Bundle bundle(Document document) {
         try {
             FormatCheck.require(document.root(), Bundle.FORMAT, Bundle.VERSION);
             Compiled.SCHEMA.check(document).stream().findFirst().ifPresent(defect -> {

@@ -9,6 +9,7 @@ import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonLocation;
 import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.core.JsonStreamContext;
 import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.core.StreamReadConstraints;
 import com.fasterxml.jackson.core.StreamReadFeature;
@@ -24,6 +25,8 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.function.Predicate;
 
 /**
  * Reads JSON strictly: one object, valid UTF-8, no key twice, no number that a decimal of sensible size can't hold,
@@ -31,20 +34,26 @@ import java.util.Map;
  */
 public final class JsonReader {
     private static final int DEEPEST = 64;
-    private static final int LONGEST_NUMBER = 100;
-    private static final int LARGEST_EXPONENT = 100;
+    private static final int LONGEST_TEXT = 10_000_000;
     private static final JsonFactory FACTORY = factory(DEEPEST);
     /** What was read from elsewhere lies deeper in what holds it here. */
     private static final JsonFactory OWN = factory(DEEPEST + 8);
 
+    private static final Predicate<JsonStreamContext> NONE = object -> false;
+
     private final JsonParser parser;
     private final boolean placing;
+    private final Predicate<JsonStreamContext> passed;
     private final Map<Pointer, Document.Place> places = new HashMap<>();
 
-    /** @param placing whether the place of each value is kept */
-    private JsonReader(JsonParser parser, boolean placing) {
+    /**
+     * @param placing whether the place of each value is kept
+     * @param passed  which objects are only read over
+     */
+    private JsonReader(JsonParser parser, boolean placing, Predicate<JsonStreamContext> passed) {
         this.parser = parser;
         this.placing = placing;
+        this.passed = passed;
     }
 
     /**
@@ -55,24 +64,52 @@ public final class JsonReader {
      *                 that it is about; {@code json-not-utf8}
      */
     public static Document read(byte[] bytes) {
-        return read(bytes, FACTORY);
+        return read(bytes, FACTORY, NONE);
+    }
+
+    /**
+     * As {@link #read(byte[])}, without what some objects hold: that is read as strictly and may not be kept.
+     *
+     * @param passed which objects those are, by where they stand
+     */
+    static Document read(byte[] bytes, Predicate<JsonStreamContext> passed) {
+        return read(bytes, FACTORY, passed);
     }
 
     /** As {@link #read(byte[])}, for what this program wrote around documents that were read before. */
     static Document readOwn(byte[] bytes) {
-        return read(bytes, OWN);
+        return read(bytes, OWN, NONE);
     }
 
     private static JsonFactory factory(int deepest) {
         return JsonFactory.builder().disable(StreamReadFeature.INCLUDE_SOURCE_IN_LOCATION)
                 .streamReadConstraints(StreamReadConstraints.builder().maxNestingDepth(deepest)
-                        .maxNumberLength(LONGEST_NUMBER).maxStringLength(10_000_000).build())
+                        .maxNumberLength(Decimals.LONGEST).maxStringLength(LONGEST_TEXT).build())
                 .build();
     }
 
-    private static Document read(byte[] bytes, JsonFactory factory) {
-        String text = decode(bytes);
-        return new Document(read(text, factory, false).root(), () -> Map.copyOf(read(text, factory, true).reader().places));
+    private static Document read(byte[] bytes, JsonFactory factory, Predicate<JsonStreamContext> passed) {
+        Branch root = readBytes(bytes, factory, passed)
+                .orElseGet(() -> read(decode(bytes), factory, false).root());
+        return new Document(root, () -> Map.copyOf(read(decode(bytes), factory, true).reader().places));
+    }
+
+    /**
+     * Reads the bytes as they are, which costs a fraction of reading their text.
+     *
+     * @return nothing where anything is not as it should be; its text tells what, and where that stands
+     */
+    private static Optional<Branch> readBytes(byte[] bytes, JsonFactory factory,
+                                              Predicate<JsonStreamContext> passed) {
+        // Without these two beginnings the parser would look for other encodings than UTF-8.
+        if (bytes.length < 2 || bytes[0] != '{' || bytes[1] == 0 || !Utf8.holds(bytes)) {
+            return Optional.empty();
+        }
+        try (JsonParser parser = factory.createParser(bytes)) {
+            return Optional.of(new JsonReader(parser, false, passed).document());
+        } catch (IOException | Refused e) {
+            return Optional.empty();
+        }
     }
 
     private record Read(JsonReader reader, Branch root) {
@@ -80,7 +117,7 @@ public final class JsonReader {
 
     private static Read read(String text, JsonFactory factory, boolean placing) {
         try (JsonParser parser = factory.createParser(text)) {
-            JsonReader reader = new JsonReader(parser, placing);
+            JsonReader reader = new JsonReader(parser, placing, NONE);
             return new Read(reader, read(reader));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
@@ -125,7 +162,7 @@ public final class JsonReader {
             places.put(here, new Document.Place(location.getLineNr(), location.getColumnNr()));
         }
         return switch (token) {
-            case START_OBJECT -> branch(here);
+            case START_OBJECT -> passed.test(parser.getParsingContext()) ? passedOver(token) : branch(here);
             case START_ARRAY -> series(here);
             case VALUE_STRING -> new Node.Text(wellFormed(parser.getText()));
             case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT -> new Node.Decimal(decimal());
@@ -134,6 +171,13 @@ public final class JsonReader {
             case VALUE_NULL -> new Node.Blank();
             default -> throw refused("syntax", "");
         };
+    }
+
+    private Branch passedOver(JsonToken token) throws IOException {
+        if (!new PassedOver(parser).isStrict(token)) {
+            throw refused("syntax", "");
+        }
+        return Branch.EMPTY;
     }
 
     private Branch branch(Pointer here) throws IOException {
@@ -157,28 +201,17 @@ public final class JsonReader {
     }
 
     private BigDecimal decimal() throws IOException {
-        try {
-            BigDecimal number = new BigDecimal(parser.getText());
-            // It is written without an exponent, and has to be read again then.
-            if (Math.abs((long) number.scale()) <= LARGEST_EXPONENT
-                    && number.toPlainString().length() <= LONGEST_NUMBER) {
-                return number.scale() < 0 ? number.setScale(0) : number;
-            }
-        } catch (NumberFormatException e) {
-            throw new Refused(refused("number", parser.getText()).defect(), e);
+        Optional<BigDecimal> number = Decimals.read(parser.getTextCharacters(), parser.getTextOffset(),
+                parser.getTextLength());
+        if (number.isEmpty()) {
+            throw refused("number", parser.getText());
         }
-        throw refused("number", parser.getText());
+        return number.get();
     }
 
-    /** Escapes can smuggle half a surrogate pair into a text, which no file could then hold. */
     private String wellFormed(String text) {
-        for (int i = 0; i < text.length(); i++) {
-            if (Character.isSurrogate(text.charAt(i))) {
-                if (!StandardCharsets.UTF_8.newEncoder().canEncode(text)) {
-                    throw refused("surrogate", "");
-                }
-                return text;
-            }
+        if (!WellFormed.is(text)) {
+            throw refused("surrogate", "");
         }
         return text;
     }

@@ -11,8 +11,7 @@ import com.fasterxml.jackson.core.util.Separators;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
-import java.util.Map;
-import java.util.TreeMap;
+import java.util.Arrays;
 
 /** Writes documents: the same tree always gives the same bytes, on every machine. */
 public final class JsonWriter {
@@ -66,10 +65,13 @@ public final class JsonWriter {
     private static void put(JsonGenerator generator, Node node, boolean sorted) throws IOException {
         if (node instanceof Branch branch) {
             generator.writeStartObject();
-            Map<String, Node> members = sorted ? new TreeMap<>(branch.members()) : branch.members();
-            for (Map.Entry<String, Node> member : members.entrySet()) {
-                generator.writeFieldName(member.getKey());
-                put(generator, member.getValue(), sorted);
+            String[] keys = branch.members().keySet().toArray(String[]::new);
+            if (sorted) {
+                Arrays.sort(keys);
+            }
+            for (String key : keys) {
+                generator.writeFieldName(key);
+                put(generator, branch.members().get(key), sorted);
             }
             generator.writeEndObject();
         } else if (node instanceof Node.Series series) {

@@ -1,33 +1,56 @@
 package bedmark.office;
 
 import bedmark.index.office.OfficeTables;
+import bedmark.journal.NotSaved;
 import bedmark.survey.Entry;
 import bedmark.survey.OfficeDeed;
+import java.util.List;
 import java.util.Optional;
-import java.util.function.BooleanSupplier;
 import java.util.function.Supplier;
 
 /** Where the office's deeds are kept for good, and the tables over them. Used by one thread. */
 interface Books extends AutoCloseable {
 
-    /** What a deed makes of the tables. */
-    @FunctionalInterface
+    /** What deeds need before they are kept, and what they make of the tables. */
     interface Effect {
-        /** @param intake what a pack brings, where that was read already */
-        void of(OfficeTables tables, Entry entry, Optional<Intake> intake);
+        /** Whether nothing would come of a deed; asked when nobody else can write any more. */
+        boolean needless(OfficeTables tables, Deed deed);
+
+        /** Brings onto the medium what the deeds will name. */
+        void prepare(List<Deed> deeds);
+
+        /** What deeds that follow one another make of the tables. */
+        void of(OfficeTables tables, List<Done> deeds);
+    }
+
+    /** A pack that lies in the store's folder and what it brings. */
+    record Pack(PackShelf.Laid laid, Intake intake) {
     }
 
     /** A deed that waits to be done. */
-    record Deed(String person, OfficeDeed deed, Optional<Intake> intake) {
+    record Deed(String person, OfficeDeed deed, Optional<Pack> pack) {
+        Deed(String person, OfficeDeed deed) {
+            this(person, deed, Optional.empty());
+        }
     }
 
     /**
-     * Does a deed: when this returns, it is on the medium and in the tables.
+     * A deed that was done.
      *
-     * @param needless asked when nobody else can write any more
-     * @return nothing where it was needless
+     * @param intake what a pack brings, where that was read already
      */
-    Optional<Entry> keep(BooleanSupplier needless, Deed deed);
+    record Done(Entry entry, Optional<Intake> intake) {
+    }
+
+    /**
+     * Does the first of some deeds, and as many of those that follow as go together with it: when this returns, they
+     * are on the medium and in the tables. Each is whole or was not done, whenever the power is cut.
+     *
+     * @param deeds at least one, none of which makes another one needless
+     * @return what came of them, fewer than there are deeds where some are left; nothing for one that was needless
+     * @throws NotSaved where the first could not be done
+     */
+    List<Optional<Entry>> keep(List<Deed> deeds);
 
     /** Asks the tables, and makes them anew or connects again where they fail. */
     <T> T ask(Supplier<T> question);

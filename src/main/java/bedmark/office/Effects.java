@@ -4,7 +4,6 @@ import bedmark.index.office.OfficeTables;
 import bedmark.index.office.PlantRow;
 import bedmark.index.office.Standing;
 import bedmark.json.BundleReader;
-import bedmark.json.JsonReader;
 import bedmark.journal.Progress;
 import bedmark.pack.PackLimits;
 import bedmark.pack.PackReader;
@@ -18,6 +17,7 @@ import bedmark.survey.merge.Merge;
 import bedmark.survey.merge.MergedZone;
 import bedmark.survey.merge.ZoneId;
 import bedmark.index.office.CopyRow;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
@@ -29,6 +29,7 @@ final class Effects implements Books.Effect {
     private final PackShelf shelf;
     private final PackLimits limits;
     private final Function<OfficeTables, Minutes> minutes;
+    private final Registers registers = new Registers();
 
     /** @param minutes what was done so far, the deed under way included */
     Effects(PackShelf shelf, PackLimits limits, Function<OfficeTables, Minutes> minutes) {
@@ -38,50 +39,72 @@ final class Effects implements Books.Effect {
     }
 
     @Override
-    public void of(OfficeTables tables, Entry entry, Optional<Intake> intake) {
-        if (!(entry.act() instanceof Act.OfficeActed acted)) {
-            return;
+    public boolean needless(OfficeTables tables, Books.Deed deed) {
+        return deed.deed() instanceof OfficeDeed.PackReceived pack && tables.hasPack(pack.sha256());
+    }
+
+    @Override
+    public void prepare(List<Books.Deed> deeds) {
+        List<PackShelf.Laid> laid = deeds.stream().flatMap(deed -> deed.pack().stream()).map(Books.Pack::laid).toList();
+        if (!laid.isEmpty()) {
+            shelf.keep(laid);
         }
-        OfficeDeed deed = acted.deed();
+    }
+
+    @Override
+    public void of(OfficeTables tables, List<Books.Done> deeds) {
+        List<Copy> added = new ArrayList<>();
+        for (Books.Done done : deeds) {
+            if (done.entry().act() instanceof Act.OfficeActed acted) {
+                added.addAll(of(tables, done.entry(), acted.deed(), done.intake()));
+            }
+        }
+        if (!added.isEmpty()) {
+            stand(tables, Set.copyOf(added.stream().map(Copy::zone).distinct().toList()), minutes.apply(tables));
+            tables.staleDrives(added);
+        }
+    }
+
+    /** What came in by it; what its zones come to is told when all of them are in. */
+    private List<Copy> of(OfficeTables tables, Entry entry, OfficeDeed deed, Optional<Intake> intake) {
         if (deed instanceof OfficeDeed.PackReceived pack) {
-            take(tables, entry.sequence(), pack, intake.orElseGet(() -> read(pack.sha256())));
+            return take(tables, entry.sequence(), pack, intake.orElseGet(() -> read(pack.sha256())));
         } else if (deed instanceof OfficeDeed.RegisterChanged changed) {
             PlantRow row = Intake.plant(changed.head(), Intake.millis(entry.at()), true);
-            Register register = register(row);
+            Register register = registers.of(row);
             tables.addRegister(row.register(), row.id(), Intake.registerText(register));
             put(tables, row, register);
         } else if (deed instanceof OfficeDeed.ClashSettled settled) {
             stand(tables, Set.of(settled.zone()), minutes.apply(tables));
         }
+        return List.of();
     }
 
     /** Reads a pack of the shelf once more. */
     private Intake read(String sha256) {
-        ReadPack pack = new PackReader(limits, BundleReader::read).open(shelf.file(sha256), Progress.NONE);
+        ReadPack pack = new PackReader(limits, BundleReader::readUnjudged).open(shelf.file(sha256), Progress.NONE);
         return Intake.of(pack.bundle(), sha256);
     }
 
-    private void take(OfficeTables tables, long sequence, OfficeDeed.PackReceived pack, Intake intake) {
+    private List<Copy> take(OfficeTables tables, long sequence, OfficeDeed.PackReceived pack, Intake intake) {
         tables.addPack(pack.sha256(), sequence, shelf.forTables(pack.sha256()));
         tables.addRegister(intake.plant().register(), intake.plant().id(), intake.register());
         Optional<PlantRow> known = tables.plant(intake.plant().id());
-        if (known.isEmpty() || !known.get().own() && later(intake.plant(), known.get())) {
-            Register register = register(intake.plant());
-            if (known.filter(one -> one.register().equals(intake.plant().register())).isPresent()) {
-                tables.put(intake.plant());
-            } else {
-                put(tables, intake.plant(), register);
-            }
+        boolean newer = known.isEmpty() || !known.get().own() && later(intake.plant(), known.get());
+        PlantRow holds = newer ? intake.plant() : known.get();
+        if (newer && known.filter(one -> one.register().equals(holds.register())).isPresent()) {
+            tables.put(holds);
+        } else if (newer) {
+            put(tables, holds, registers.of(holds));
         }
         Set<String> touched = tables.add(intake.copies());
         List<Copy> added = intake.copies().stream().map(CopyRow::copy).filter(copy -> touched.contains(copy.digest()))
                 .toList();
         if (!added.isEmpty()) {
-            Set<ZoneId> zones = Set.copyOf(added.stream().map(Copy::zone).distinct().toList());
-            tables.addUnnamed(zones, plantName(tables, intake.plant().id()));
-            stand(tables, zones, minutes.apply(tables));
-            tables.staleDrives(added);
+            tables.addUnnamed(Set.copyOf(added.stream().map(Copy::zone).distinct().toList()),
+                    registers.of(holds).name());
         }
+        return added;
     }
 
     private static boolean later(PlantRow one, PlantRow other) {
@@ -91,14 +114,6 @@ final class Effects implements Books.Effect {
     private static void put(OfficeTables tables, PlantRow row, Register register) {
         tables.put(row);
         tables.name(row.id(), register.name(), Intake.names(register));
-    }
-
-    static Register register(PlantRow row) {
-        return new Register(JsonReader.read(row.content()).root().branch("plant").orElseThrow());
-    }
-
-    private static String plantName(OfficeTables tables, String plant) {
-        return tables.plant(plant).map(row -> register(row).name()).orElse("");
     }
 
     private static void stand(OfficeTables tables, Collection<ZoneId> zones, Minutes minutes) {

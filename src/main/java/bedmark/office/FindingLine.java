@@ -9,6 +9,9 @@ import bedmark.engine.verdict.Rule;
 import bedmark.engine.verdict.Sense;
 import java.math.BigDecimal;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.Function;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 
@@ -21,6 +24,10 @@ import java.util.stream.Stream;
 public record FindingLine(Rule rule, Level level, double observed, double standardUncertainty) {
     /** How many standard uncertainties of the difference tell worse from the same. */
     private static final double COVERAGE = 2;
+    private static final Map<String, Level> LEVELS =
+            Stream.of(Level.values()).collect(Collectors.toMap(Level::code, Function.identity()));
+    private static final Map<String, Rule> RULES =
+            Stream.of(Rule.values()).collect(Collectors.toMap(Rule::code, Function.identity()));
 
     /** Everything of an assessment that is not within its limits, today or at design feed. */
     static List<FindingLine> of(Assessment assessment) {
@@ -75,10 +82,10 @@ public record FindingLine(Rule rule, Level level, double observed, double standa
     }
 
     private static Rule rule(String code) {
-        return Rule.ofCode(code).orElseThrow();
+        return Optional.ofNullable(RULES.get(code)).orElseThrow();
     }
 
     private static Level level(String code) {
-        return Stream.of(Level.values()).filter(level -> level.code().equals(code)).findFirst().orElseThrow();
+        return Optional.ofNullable(LEVELS.get(code)).orElseThrow();
     }
 }

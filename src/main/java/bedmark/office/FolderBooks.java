@@ -5,13 +5,13 @@ import bedmark.document.Refused;
 import bedmark.index.office.DeedRow;
 import bedmark.index.office.OfficeBroken;
 import bedmark.index.office.OfficeTables;
-import bedmark.journal.Digest;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
 import bedmark.journal.Journal;
 import bedmark.journal.JournalProof;
 import bedmark.journal.JournalVisitor;
 import bedmark.journal.Mark;
+import bedmark.journal.NotSaved;
 import bedmark.journal.Place;
 import bedmark.journal.Replay;
 import bedmark.json.EntryCodec;
@@ -21,12 +21,11 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
-import java.util.HexFormat;
 import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
-import java.util.function.BooleanSupplier;
 import java.util.function.Supplier;
+import java.util.stream.IntStream;
 
 /** An office of its own in a folder: the journal is the truth, the tables are made anew from it where they fail. */
 final class FolderBooks implements Books {
@@ -78,7 +77,7 @@ final class FolderBooks implements Books {
         Optional<Mark> mark = Optional.empty();
         try {
             tables = Optional.of(OfficeTables.of(index));
-            mark = tables().setting(MARK).map(FolderBooks::readMark);
+            mark = tables().setting(MARK).map(MarkText::read);
         } catch (OfficeBroken | IllegalArgumentException e) {
             rebuilt = true;
             drop();
@@ -148,7 +147,7 @@ final class FolderBooks implements Books {
                 return;
             }
             try {
-                take(entry, new Mark(identity, sequence, place), Optional.empty());
+                take(List.of(new Done(entry, Optional.empty())), new Mark(identity, sequence, place));
             } catch (Refused e) {
                 // A pack that can no longer be read: what it brought is missing, and everything else is not.
                 found.add(e.defect());
@@ -157,11 +156,12 @@ final class FolderBooks implements Books {
         }
     }
 
-    private void take(Entry entry, Mark mark, Optional<Intake> intake) {
+    /** @param mark of the last of them */
+    private void take(List<Done> deeds, Mark mark) {
         tables().whole(() -> {
-            tables().add(row(entry));
-            effect.of(tables(), entry, intake);
-            tables().set(MARK, write(mark));
+            deeds.forEach(done -> tables().add(row(done.entry())));
+            effect.of(tables(), deeds);
+            tables().set(MARK, MarkText.write(mark));
             return true;
         });
     }
@@ -169,7 +169,7 @@ final class FolderBooks implements Books {
     private void note(Entry entry, Mark mark) {
         tables().whole(() -> {
             tables().add(row(entry));
-            tables().set(MARK, write(mark));
+            tables().set(MARK, MarkText.write(mark));
             return true;
         });
     }
@@ -177,23 +177,6 @@ final class FolderBooks implements Books {
     static DeedRow row(Entry entry) {
         return new DeedRow(entry.sequence(), entry.at().toString(), entry.person(), entry.device(),
                 entry.act().code(), EntryCodec.write(entry));
-    }
-
-    private static String write(Mark mark) {
-        Place place = mark.place();
-        return String.join(" ", mark.journal().toString(), Long.toString(mark.sequence()),
-                Integer.toString(place.segment()), Long.toString(place.offset()), Integer.toString(place.length()),
-                place.hash().hex());
-    }
-
-    private static Mark readMark(String text) {
-        String[] parts = text.split(" ");
-        if (parts.length != 6) {
-            throw new IllegalArgumentException("no mark: " + text);
-        }
-        return new Mark(UUID.fromString(parts[0]), Long.parseLong(parts[1]), new Place(Integer.parseInt(parts[2]),
-                Long.parseLong(parts[3]), Integer.parseInt(parts[4]),
-                Digest.ofBytes(HexFormat.of().parseHex(parts[5]))));
     }
 
     private void drop() throws IOException {
@@ -214,19 +197,45 @@ final class FolderBooks implements Books {
     }
 
     @Override
-    public Optional<Entry> keep(BooleanSupplier needless, Deed deed) {
-        if (ask(needless::getAsBoolean)) {
-            return Optional.empty();
-        }
-        Journal.Saved saved = journal.orElseThrow().append(OffsetDateTime.now(options.clock()), deed.person(), device,
-                new Act.OfficeActed(deed.deed()));
-        Mark mark = new Mark(journal.orElseThrow().identity(), saved.entry().sequence(), saved.place());
+    public List<Optional<Entry>> keep(List<Deed> deeds) {
+        List<Boolean> needless = ask(() -> deeds.stream().map(deed -> effect.needless(tables(), deed)).toList());
+        effect.prepare(IntStream.range(0, deeds.size()).filter(i -> !needless.get(i)).mapToObj(deeds::get).toList());
+        List<Optional<Entry>> kept = new ArrayList<>();
+        List<Done> done = new ArrayList<>();
+        Optional<Place> last = Optional.empty();
         try {
-            take(saved.entry(), mark, deed.intake());
+            for (int i = 0; i < deeds.size(); i++) {
+                if (needless.get(i)) {
+                    kept.add(Optional.empty());
+                    continue;
+                }
+                Journal.Saved saved = append(deeds.get(i));
+                kept.add(Optional.of(saved.entry()));
+                done.add(new Done(saved.entry(), deeds.get(i).pack().map(Pack::intake)));
+                last = Optional.of(saved.place());
+            }
+        } catch (NotSaved e) {
+            // Those before it are in the journal, and so is nothing of those after it.
+            if (kept.isEmpty()) {
+                throw e;
+            }
+        }
+        last.ifPresent(place -> tell(done, place));
+        return kept;
+    }
+
+    private Journal.Saved append(Deed deed) {
+        return journal.orElseThrow().append(OffsetDateTime.now(options.clock()), deed.person(), device,
+                new Act.OfficeActed(deed.deed()));
+    }
+
+    /** Tells the tables what the journal holds already. */
+    private void tell(List<Done> done, Place last) {
+        try {
+            take(done, new Mark(journal.orElseThrow().identity(), done.get(done.size() - 1).entry().sequence(), last));
         } catch (OfficeBroken e) {
             rebuild();
         }
-        return Optional.of(saved.entry());
     }
 
     @Override

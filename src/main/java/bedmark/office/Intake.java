@@ -23,6 +23,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.Set;
+import java.util.stream.Collectors;
 
 /**
  * What a bundle brings, ready to be taken in.
@@ -55,6 +57,19 @@ record Intake(PlantRow plant, byte[] register, List<CopyRow> copies) {
         }
         return new Intake(new PlantRow(plantId(register), createdAt, false, Digest.of(headText).hex(), registerDigest,
                 headText), registerText, copies);
+    }
+
+    /** How much it holds in memory, as far as that grows with its surveys. */
+    long bytes() {
+        return register.length + copies.stream().mapToLong(row -> row.content().length).sum();
+    }
+
+    Set<String> digests() {
+        return copies.stream().map(row -> row.copy().digest()).collect(Collectors.toSet());
+    }
+
+    Set<ZoneId> zones() {
+        return copies.stream().map(row -> row.copy().zone()).collect(Collectors.toSet());
     }
 
     /** The part of a bundle that holds register, forms and rounds. */

@@ -197,8 +197,8 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     /**
-     * Takes packs in, one after the other; each whole or not at all. The next ones are proved meanwhile. A person may
-     * stop it between two of them.
+     * Takes packs in, one after the other; each whole or not at all. Some small ones are brought onto the medium and
+     * into the tables together, while the next ones are proved. A person may stop it between two of them.
      *
      * @param person   who receives
      * @param progress told of the packs, and asked whether to stop
@@ -237,22 +237,16 @@ public final class OfficeStore implements AutoCloseable {
         if (deed instanceof OfficeDeed.PackReceived) {
             throw new IllegalArgumentException("a pack is received");
         }
-        return keep(tables -> false, () -> { }, new Books.Deed(person, deed, Optional.empty())).orElseThrow();
+        return keep(List.of(new Books.Deed(person, deed))).get(0).orElseThrow();
     }
 
-    /** Does a deed unless it is needless, and something before it. */
-    Optional<Entry> keep(Function<OfficeTables, Boolean> needless, Runnable first, Books.Deed deed) {
+    /** As {@link Books#keep}. */
+    List<Optional<Entry>> keep(List<Books.Deed> deeds) {
         try {
             return desk.call(() -> {
                 try {
                     rows.clear();
-                    return books.keep(() -> {
-                        if (needless.apply(books.tables())) {
-                            return true;
-                        }
-                        first.run();
-                        return false;
-                    }, deed);
+                    return books.keep(deeds);
                 } catch (RuntimeException e) {
                     // It may have read a deed that was taken back.
                     minutes = new Minutes();
@@ -435,7 +429,7 @@ public final class OfficeStore implements AutoCloseable {
     public Map<String, Register> registers() {
         return ask(tables -> {
             Map<String, Register> registers = new LinkedHashMap<>();
-            tables.plants().forEach(row -> registers.put(row.id(), Effects.register(row)));
+            tables.plants().forEach(row -> registers.put(row.id(), Registers.read(row)));
             return registers;
         });
     }

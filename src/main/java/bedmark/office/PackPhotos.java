@@ -36,7 +36,7 @@ final class PackPhotos {
             if (open.size() > OPEN_AT_MOST) {
                 open.clear();
             }
-            open.put(pack, new PackReader(limits, BundleReader::read).open(shelf.file(pack),
+            open.put(pack, new PackReader(limits, BundleReader::readUnjudged).open(shelf.file(pack),
                     Progress.NONE));
         }
         ReadPack read = open.get(pack);

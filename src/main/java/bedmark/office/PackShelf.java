@@ -12,6 +12,7 @@ import java.nio.ByteBuffer;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.security.MessageDigest;
+import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
 
@@ -96,14 +97,14 @@ final class PackShelf {
         }
     }
 
-    /** Gives a copy its name for good. */
-    void keep(Laid laid) {
-        if (!files.exists(laid.part()) && has(laid.sha256())) {
-            // It was kept, and what was to follow is tried once more.
-            return;
-        }
+    /** Gives copies their names for good; one that has it already keeps it. */
+    void keep(List<Laid> copies) {
         try {
-            files.move(laid.part(), file(laid.sha256()));
+            for (Laid laid : copies) {
+                if (files.exists(laid.part()) || !has(laid.sha256())) {
+                    files.move(laid.part(), file(laid.sha256()));
+                }
+            }
             files.forceFolder(folder);
         } catch (IOException e) {
             throw new Refused(Fault.defect("store", e, files, folder), e);

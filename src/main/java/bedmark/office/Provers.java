@@ -1,6 +1,7 @@
 package bedmark.office;
 
-import bedmark.office.Receiving.Proved;
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
@@ -13,14 +14,20 @@ import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.function.Function;
 
-/** Proves packs beside their receiving, a few ahead and in their order; what is ahead is held in memory. */
+/** Proves packs beside their receiving, some ahead and in their order; what is ahead is held in memory. */
 final class Provers implements AutoCloseable {
+    /** So many whatever they hold, and more where they are small. */
     private static final int AHEAD = 3;
+    private static final int SMALL_AHEAD = 12;
+    private static final long SMALL_BYTES = 32 << 20;
 
     private final ExecutorService threads;
     private final Iterator<Path> files;
     private final Function<Path, Proved> proving;
-    private final Deque<Future<Proved>> ahead = new ArrayDeque<>();
+    private final Deque<Work> ahead = new ArrayDeque<>();
+
+    private record Work(Future<Proved> proving, long bytes) {
+    }
 
     Provers(List<Path> files, Function<Path, Proved> proving) {
         this.files = files.iterator();
@@ -35,17 +42,33 @@ final class Provers implements AutoCloseable {
 
     /** The next pack, proved. */
     Proved next() {
-        while (ahead.size() < AHEAD && files.hasNext()) {
+        begin();
+        Future<Proved> next = ahead.remove().proving();
+        begin();
+        return await(next);
+    }
+
+    private void begin() {
+        while (files.hasNext() && (ahead.size() < AHEAD || ahead.size() < SMALL_AHEAD
+                && ahead.stream().mapToLong(Work::bytes).sum() < SMALL_BYTES)) {
             Path file = files.next();
-            ahead.add(threads.submit(() -> proving.apply(file)));
+            ahead.add(new Work(threads.submit(() -> proving.apply(file)), bytes(file)));
         }
-        return await(ahead.remove());
+    }
+
+    /** One that can't be looked at holds nothing; proving says why. */
+    private static long bytes(Path file) {
+        try {
+            return Files.size(file);
+        } catch (IOException e) {
+            return 0;
+        }
     }
 
     /** Those that are under way: what they laid down has to be let go. */
     List<Proved> rest() {
         List<Proved> rest = new ArrayList<>();
-        ahead.forEach(one -> rest.add(await(one)));
+        ahead.forEach(one -> rest.add(await(one.proving())));
         ahead.clear();
         return rest;
     }

@@ -10,6 +10,7 @@ import java.time.Duration;
 import java.time.Instant;
 import java.time.LocalDate;
 import java.time.ZonedDateTime;
+import java.util.Arrays;
 import java.util.Collection;
 import java.util.Comparator;
 import java.util.List;
@@ -17,24 +18,51 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalLong;
 import java.util.function.Function;
+import java.util.stream.Stream;
 
 /** Puts zones in order, worst first: by place, then share of the drive, then saving. */
 final class Ranking {
     private static final Level[] LEVELS = Level.values();
     /** How many overloaded zones are looked at for each that is wanted, since some were answered or filtered out. */
     private static final int READ = 2;
-    private static final Comparator<RankedZone> BY_NUMBERS = Comparator
-            .<RankedZone>comparingDouble(zone -> zone.driveShare().orElse(-1)).reversed()
-            .thenComparing(Comparator.<RankedZone>comparingDouble(zone ->
-                    zone.saving().map(Saving::wh).orElse(-1.0)).reversed());
-    private static final Comparator<RankedZone> WORST_FIRST = Comparator.comparing(RankedZone::place)
-            .thenComparing(BY_NUMBERS).thenComparing(RankedZone::zone);
+    /** From so many on it pays to share the work among the processors. */
+    private static final int MANY = 10_000;
+    private static final double UNKNOWN = -1;
+    private static final Comparator<RankedZone> BY_NUMBERS = (one, other) -> byNumbers(driveShare(one),
+            driveShare(other), saving(one), saving(other));
+    private static final Comparator<Keyed> WORST_FIRST = (one, other) -> {
+        int place = one.place.compareTo(other.place);
+        int numbers = place != 0 ? place : byNumbers(one.driveShare, other.driveShare, one.saving, other.saving);
+        return numbers != 0 ? numbers : one.zone.zone().compareTo(other.zone.zone());
+    };
+
+    /** A zone beside the numbers that it is sorted by, each looked up once. */
+    private record Keyed(RankedZone zone, Place place, double driveShare, double saving) {
+        static Keyed of(RankedZone zone) {
+            return new Keyed(zone, zone.place(), Ranking.driveShare(zone), Ranking.saving(zone));
+        }
+    }
+
+    private static double driveShare(RankedZone zone) {
+        return zone.driveShare().orElse(UNKNOWN);
+    }
+
+    private static double saving(RankedZone zone) {
+        return zone.saving().isPresent() ? zone.saving().get().wh() : UNKNOWN;
+    }
+
+    /** The larger numbers first. */
+    private static int byNumbers(double share, double otherShare, double saving, double otherSaving) {
+        int shares = Double.compare(otherShare, share);
+        return shares != 0 ? shares : Double.compare(otherSaving, saving);
+    }
 
     private final Instant now;
     private final LocalDate today;
     private final RankQuery query;
     private final Function<ZoneId, Collection<Answered>> answers;
 
+    /** @param answers asked by several threads at once while this thread waits for them */
     Ranking(ZonedDateTime now, RankQuery query, Function<ZoneId, Collection<Answered>> answers) {
         this.now = now.toInstant();
         this.today = now.toLocalDate();
@@ -43,8 +71,11 @@ final class Ranking {
     }
 
     List<RankedZone> rank(List<ZoneRow> rows) {
-        return rows.stream().filter(row -> row.names().registered() || row.standing().visit().isPresent())
-                .map(this::ranked).filter(query::holds).sorted(WORST_FIRST).toList();
+        Stream<ZoneRow> zones = rows.size() > MANY ? rows.parallelStream() : rows.stream();
+        Keyed[] keyed = zones.filter(row -> row.names().registered() || row.standing().visit().isPresent())
+                .map(this::ranked).filter(query::holds).map(Keyed::of).toArray(Keyed[]::new);
+        Arrays.parallelSort(keyed, WORST_FIRST);
+        return Stream.of(keyed).map(Keyed::zone).toList();
     }
 
     /**

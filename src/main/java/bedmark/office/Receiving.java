@@ -3,9 +3,12 @@ package bedmark.office;
 import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.index.office.CopyRow;
+import bedmark.index.office.OfficeTables;
 import bedmark.journal.NotSaved;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
+import bedmark.office.Proved.Sound;
 import bedmark.pack.PackReader;
 import bedmark.pack.ReadPack;
 import bedmark.pack.Receipt;
@@ -13,21 +16,28 @@ import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.merge.Clash;
+import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Merge;
-import bedmark.survey.merge.ZoneId;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.UUID;
+import java.util.stream.Collectors;
 
 /** Takes packs in: copied beside the others, proved there, and only then told to the books; receipts of what is in. */
 final class Receiving {
+    /** Packs that are brought onto the medium and into the tables together. */
+    private static final int TOGETHER = 8;
+    private static final long TOGETHER_BYTES = 8 << 20;
+
     private final OfficeStore store;
     private final PackShelf shelf;
     private final OfficeOptions options;
@@ -42,31 +52,33 @@ final class Receiving {
         List<Received> received = new ArrayList<>();
         try (Provers provers = new Provers(files, this::prove)) {
             while (received.size() < files.size()) {
-                if (progress.cancelled()) {
+                received.addAll(take(together(provers, received.size(), files.size(), progress), person));
+                if (received.size() < files.size() && progress.cancelled()) {
                     provers.rest().forEach(proved -> proved.laid().ifPresent(laid -> shelf.drop(laid.part())));
                     return received;
                 }
-                progress.at(received.size(), files.size());
-                received.add(take(provers.next(), person));
             }
         }
         progress.at(files.size(), files.size());
         return received;
     }
 
-    Received receive(Path file, String person) {
-        return take(prove(file), person);
+    /** The next packs that go together: few, and small ones. */
+    private static List<Proved> together(Provers provers, int done, int total, Progress progress) {
+        List<Proved> packs = new ArrayList<>();
+        long bytes = 0;
+        while (packs.size() < TOGETHER && done + packs.size() < total && bytes < TOGETHER_BYTES
+                && !progress.cancelled()) {
+            progress.at(done + packs.size(), total);
+            Proved next = provers.next();
+            packs.add(next);
+            bytes += next.sound().map(sound -> sound.pack().intake().bytes()).orElse(0L);
+        }
+        return packs;
     }
 
-    /**
-     * A pack that was looked at; nothing of it is taken in yet.
-     *
-     * @param laid   its copy in the store's folder
-     * @param pack   what it holds, where it is sound
-     * @param defect why it is refused, where it is not
-     */
-    record Proved(Path file, Optional<PackShelf.Laid> laid, Optional<ReadPack> pack, Optional<Intake> intake,
-                  Optional<Defect> defect) {
+    Received receive(Path file, String person) {
+        return take(List.of(prove(file)), person).get(0);
     }
 
     /** Looks at a pack in the calling thread. */
@@ -74,57 +86,115 @@ final class Receiving {
         Optional<PackShelf.Laid> laid = Optional.empty();
         try {
             laid = Optional.of(shelf.lay(file));
-            ReadPack pack = new PackReader(options.limits(), BundleReader::read).open(laid.get().part(),
+            ReadPack pack = new PackReader(options.limits(), BundleReader::readUnjudged).open(laid.get().part(),
                     Progress.NONE);
-            return new Proved(file, laid, Optional.of(pack), Optional.of(Intake.of(pack.bundle(),
-                    laid.get().sha256())), Optional.empty());
+            Branch document = pack.bundle().document();
+            Branch head = Branch.EMPTY;
+            for (String key : List.of("id", "createdAt", "device")) {
+                head = document.has(key) ? head.with(key, document.get(key).get()) : head;
+            }
+            Intake intake = Intake.of(pack.bundle(), laid.get().sha256());
+            return Proved.sound(new Sound(file, new Books.Pack(laid.get(), intake), pack.fingerprint().text(), head));
         } catch (Refused e) {
             boolean copied = laid.filter(copy -> e.defect().where().equals(copy.part().toString())).isPresent();
-            return new Proved(file, laid, Optional.empty(), Optional.empty(), Optional.of(copied
-                    ? new Defect(e.defect().code(), file.toString(), e.defect().details()) : e.defect()));
+            return Proved.refused(file, laid, copied
+                    ? new Defect(e.defect().code(), file.toString(), e.defect().details()) : e.defect());
         }
     }
 
-    private Received take(Proved proved, String person) {
-        Optional<String> fingerprint = proved.pack().map(pack -> pack.fingerprint().text());
-        Optional<Defect> defect = proved.defect();
-        if (defect.isEmpty()) {
-            try {
-                return take(proved.file(), proved.laid().orElseThrow(), proved.pack().orElseThrow(),
-                        proved.intake().orElseThrow(), person);
-            } catch (Refused e) {
-                defect = Optional.of(e.defect());
-            } catch (NotSaved e) {
-                defect = Optional.of(e.defect());
+    /** What comes of packs, in their order. */
+    private List<Received> take(List<Proved> packs, String person) {
+        Set<String> trusted = store.ask(tables -> packs.stream().flatMap(proved -> proved.sound().stream())
+                .map(Sound::fingerprint).filter(store.minutes(tables)::trusts).collect(Collectors.toSet()));
+        List<Received> received = new ArrayList<>();
+        Map<String, Sound> waiting = new LinkedHashMap<>();
+        for (Proved proved : packs) {
+            Optional<Sound> sound = proved.sound().filter(one -> trusted.contains(one.fingerprint()));
+            if (sound.isEmpty() || waiting.containsKey(sound.get().sha256())) {
+                received.addAll(keep(List.copyOf(waiting.values()), person));
+                waiting.clear();
+            }
+            if (sound.isPresent()) {
+                waiting.put(sound.get().sha256(), sound.get());
+            } else {
+                received.add(turned(proved));
             }
         }
-        proved.laid().ifPresent(laid -> shelf.drop(laid.part()));
-        return new Received.Turned(proved.file(), defect.get(), fingerprint);
+        received.addAll(keep(List.copyOf(waiting.values()), person));
+        return received;
     }
 
-    private Received take(Path file, PackShelf.Laid laid, ReadPack pack, Intake intake, String person) {
-        String fingerprint = pack.fingerprint().text();
-        Branch document = pack.bundle().document();
-        Branch sender = document.branch("device").orElse(Branch.EMPTY);
-        String name = sender.text("name").orElse("");
-        String shown = name.isBlank() ? fingerprint : name;
-        if (!store.ask(tables -> store.minutes(tables).trusts(fingerprint))) {
-            throw new Refused(Defect.in(shown, "device-untrusted", fingerprint));
+    /** One that is not sound, or whose device is not trusted. */
+    private Received turned(Proved proved) {
+        proved.laid().ifPresent(laid -> shelf.drop(laid.part()));
+        return new Received.Turned(proved.file(), proved.defect().orElseGet(() -> proved.sound().map(sound ->
+                Defect.in(sound.shown(), "device-untrusted", sound.fingerprint())).orElseThrow()),
+                proved.sound().map(Sound::fingerprint));
+    }
+
+    /** Keeps packs that differ; where they can't all be kept together, each says for itself why. */
+    private List<Received> keep(List<Sound> packs, String person) {
+        List<Received> received = new ArrayList<>();
+        int most = packs.size();
+        while (received.size() < packs.size()) {
+            int from = received.size();
+            List<Sound> some = packs.subList(from, Math.min(from + most, packs.size()));
+            try {
+                received.addAll(kept(some, person));
+            } catch (Refused e) {
+                most = alone(some, e.defect(), received);
+            } catch (NotSaved e) {
+                most = alone(some, e.defect(), received);
+            }
         }
-        OfficeDeed deed = new OfficeDeed.PackReceived(laid.sha256(), file.getFileName().toString(), laid.bytes(),
-                fingerprint, document.uuid("id"), document.time("createdAt"), sender.uuid("id"), name);
-        Set<String> before = store.ask(tables -> tables.known(digests(intake)));
-        Optional<Entry> entry = store.keep(tables -> tables.hasPack(laid.sha256()), () -> shelf.keep(laid),
-                new Books.Deed(person, deed, Optional.of(intake)));
-        shelf.passed(laid.sha256());
-        if (entry.isEmpty()) {
-            shelf.drop(laid.part());
-            return new Received.AlreadyHere(file, laid.sha256(), shown, fingerprint, receipt(document, intake,
-                    received(laid.sha256())));
+        return received;
+    }
+
+    private int alone(List<Sound> failed, Defect defect, List<Received> received) {
+        if (failed.size() == 1) {
+            Sound pack = failed.get(0);
+            shelf.drop(pack.pack().laid().part());
+            received.add(new Received.Turned(pack.file(), defect, Optional.of(pack.fingerprint())));
         }
-        int known = (int) digests(intake).stream().filter(before::contains).count();
-        return new Received.Taken(file, laid.sha256(), shown, fingerprint, digests(intake).size() - known, known,
-                clashes(intake), ahead(document, entry.get().at()), receipt(document, intake, entry.get()));
+        return 1;
+    }
+
+    /** What came of the first of some packs, and of those that were kept with it. */
+    private List<Received> kept(List<Sound> packs, String person) {
+        Set<String> known = store.ask(tables -> tables.known(packs.stream()
+                .flatMap(pack -> pack.pack().intake().digests().stream()).collect(Collectors.toSet())));
+        List<Optional<Entry>> entries = store.keep(packs.stream().map(pack -> deed(pack, person)).toList());
+        List<Set<String>> fresh = new ArrayList<>();
+        for (Sound pack : packs.subList(0, entries.size())) {
+            Set<String> own = pack.pack().intake().digests();
+            own.removeAll(known);
+            known.addAll(own);
+            fresh.add(own);
+        }
+        List<List<Clash>> clashes = store.ask(tables -> clashes(tables, packs, fresh));
+        List<Received> received = new ArrayList<>();
+        for (int i = 0; i < entries.size(); i++) {
+            Sound pack = packs.get(i);
+            shelf.passed(pack.sha256());
+            if (entries.get(i).isEmpty()) {
+                shelf.drop(pack.pack().laid().part());
+                received.add(new Received.AlreadyHere(pack.file(), pack.sha256(), pack.shown(), pack.fingerprint(),
+                        receipt(pack, received(pack.sha256()))));
+            } else {
+                Entry entry = entries.get(i).get();
+                received.add(new Received.Taken(pack.file(), pack.sha256(), pack.shown(), pack.fingerprint(),
+                        fresh.get(i).size(), pack.pack().intake().digests().size() - fresh.get(i).size(),
+                        clashes.get(i), ahead(pack.head(), entry.at()), receipt(pack, entry)));
+            }
+        }
+        return received;
+    }
+
+    private static Books.Deed deed(Sound pack, String person) {
+        PackShelf.Laid laid = pack.pack().laid();
+        return new Books.Deed(person, new OfficeDeed.PackReceived(laid.sha256(), pack.file().getFileName().toString(),
+                laid.bytes(), pack.fingerprint(), pack.head().uuid("id"), pack.head().time("createdAt"),
+                pack.device().uuid("id"), pack.device().text("name").orElse("")), Optional.of(pack.pack()));
     }
 
     /** The entry by which a pack was taken in. */
@@ -135,25 +205,28 @@ final class Receiving {
     }
 
     /** The same receipt however often the same pack comes. */
-    private Optional<Receipt> receipt(Branch bundle, Intake intake, Entry entry) {
-        String sha256 = intake.copies().isEmpty() ? "" : intake.copies().get(0).pack();
-        return bundle.uuid("id").filter(id -> !sha256.isEmpty()).map(id -> Receipt.of(
-                UUID.nameUUIDFromBytes((store.device().id() + sha256).getBytes(StandardCharsets.US_ASCII)), entry.at(),
-                new Receipt.Office(store.device().id(), store.device().name()), id, sha256, intake.copies().stream().map(row ->
-                        new Receipt.Item(row.copy().id(), row.copy().revision(), row.copy().digest())).toList()));
+    private Optional<Receipt> receipt(Sound pack, Entry entry) {
+        List<CopyRow> copies = pack.pack().intake().copies();
+        return pack.head().uuid("id").filter(id -> !copies.isEmpty()).map(id -> Receipt.of(
+                UUID.nameUUIDFromBytes((store.device().id() + pack.sha256()).getBytes(StandardCharsets.US_ASCII)),
+                entry.at(), new Receipt.Office(store.device().id(), store.device().name()), id, pack.sha256(),
+                copies.stream().map(row -> new Receipt.Item(row.copy().id(), row.copy().revision(),
+                        row.copy().digest())).toList()));
     }
 
-    private static Set<String> digests(Intake intake) {
-        Set<String> digests = new HashSet<>();
-        intake.copies().forEach(row -> digests.add(row.copy().digest()));
-        return digests;
-    }
-
-    private List<Clash> clashes(Intake intake) {
-        Set<ZoneId> zones = new HashSet<>();
-        intake.copies().forEach(row -> zones.add(row.copy().zone()));
-        return store.ask(tables -> Merge.zones(tables.copies(tables.clashing(zones)), store.minutes(tables).setAside())
-                .values().stream().flatMap(zone -> zone.clashes().stream()).toList());
+    /** What clashes in each pack's zones, without what only came with packs after it. */
+    private List<List<Clash>> clashes(OfficeTables tables, List<Sound> packs, List<Set<String>> fresh) {
+        Set<String> aside = store.minutes(tables).setAside();
+        List<List<Clash>> clashes = new ArrayList<>();
+        Set<String> later = new HashSet<>();
+        for (int i = fresh.size() - 1; i >= 0; i--) {
+            List<Copy> copies = tables.copies(tables.clashing(packs.get(i).pack().intake().zones())).stream()
+                    .filter(copy -> !later.contains(copy.digest())).toList();
+            clashes.add(0, Merge.zones(copies, aside).values().stream().flatMap(zone -> zone.clashes().stream())
+                    .toList());
+            later.addAll(fresh.get(i));
+        }
+        return clashes;
     }
 
     private static long ahead(Branch bundle, OffsetDateTime now) {

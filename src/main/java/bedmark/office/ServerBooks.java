@@ -6,10 +6,10 @@ import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import java.time.Duration;
 import java.time.OffsetDateTime;
+import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
 import java.util.concurrent.locks.LockSupport;
-import java.util.function.BooleanSupplier;
 import java.util.function.Supplier;
 
 /**
@@ -38,8 +38,13 @@ final class ServerBooks implements Books {
         this.tables = Optional.of(OfficeTables.of(url));
     }
 
+    /** One at a time: other desks wait for no more than that. */
     @Override
-    public Optional<Entry> keep(BooleanSupplier needless, Deed deed) {
+    public List<Optional<Entry>> keep(List<Deed> deeds) {
+        return List.of(keep(deeds.get(0)));
+    }
+
+    private Optional<Entry> keep(Deed deed) {
         // One moment for all attempts: it tells whether an earlier one arrived before the server went away.
         OffsetDateTime at = OffsetDateTime.now(options.clock()).plusNanos(Math.floorMod(System.nanoTime(), 1_000_000));
         boolean[] tried = {false};
@@ -50,13 +55,14 @@ final class ServerBooks implements Books {
                         new Act.OfficeActed(deed.deed())));
             }
             tried[0] = true;
-            if (needless.getAsBoolean()) {
+            if (effect.needless(tables(), deed)) {
                 return Optional.<Entry>empty();
             }
+            effect.prepare(List.of(deed));
             Entry entry = new Entry(tables().lastDeed() + 1, at, deed.person(), device,
                     new Act.OfficeActed(deed.deed()));
             tables().add(FolderBooks.row(entry));
-            effect.of(tables(), entry, deed.intake());
+            effect.of(tables(), List.of(new Done(entry, deed.pack().map(Pack::intake))));
             return Optional.of(entry);
         }));
     }

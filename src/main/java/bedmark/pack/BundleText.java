@@ -5,6 +5,15 @@ import bedmark.document.Refused;
 
 /** Keeps a bundle's text within what can be held in memory as a document. */
 final class BundleText {
+    /** For each byte, how many values it lets a text have more at most. */
+    private static final byte[] MORE = new byte[256];
+
+    static {
+        MORE[','] = 1;
+        MORE['['] = 1;
+        MORE['{'] = 1;
+    }
+
     private BundleText() {
     }
 
@@ -20,9 +29,7 @@ final class BundleText {
         }
         int values = 1;
         for (byte character : text) {
-            if (character == ',' || character == '[' || character == '{') {
-                values++;
-            }
+            values += MORE[Byte.toUnsignedInt(character)];
         }
         if (values > limits.bundleValues()) {
             throw new Refused(Defect.in(Bag.BUNDLE, "pack-bundle-too-full", Integer.toString(limits.bundleValues())));

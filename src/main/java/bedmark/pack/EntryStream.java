@@ -60,7 +60,7 @@ final class EntryStream extends InputStream {
         if (count == 0) {
             return -1;
         }
-        bytes.at(slot.data() + fed, count).get(target, from, count);
+        bytes.at(slot.data() + fed, target, from, count);
         fed += count;
         return count;
     }

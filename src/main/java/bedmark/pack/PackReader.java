@@ -69,7 +69,7 @@ public final class PackReader {
         BagShape shape = BagShape.of(slots);
         Work work = new Work(progress, VIEWS * slots.stream().mapToLong(ZipSlot::size).sum());
         PackContent content = PackContent.read(bytes, slots, shape, limits, work);
-        ZipViews.check(file, content.all(), work);
+        ZipViews.check(file, content, work);
         DeviceIdentity signer = BagProof.prove(content, shape, limits);
         for (PackEntry entry : content.files().values()) {
             entry.doubt().ifPresent(doubt -> {

@@ -17,15 +17,35 @@ record ZipBytes(FileChannel file, long size) {
      */
     ByteBuffer at(long place, int length) throws IOException {
         if (place < 0 || place + length > size) {
-            throw new Refused(Defect.in("", "zip-truncated"));
+            throw truncated();
         }
         ByteBuffer buffer = ByteBuffer.allocate(length).order(ByteOrder.LITTLE_ENDIAN);
+        fill(place, buffer);
+        return buffer.flip();
+    }
+
+    /**
+     * Reads the bytes at a place into an array.
+     *
+     * @throws Refused {@code zip-truncated} where the file ends before
+     */
+    void at(long place, byte[] target, int from, int length) throws IOException {
+        if (place < 0 || place + length > size) {
+            throw truncated();
+        }
+        fill(place, ByteBuffer.wrap(target, from, length).slice());
+    }
+
+    private void fill(long place, ByteBuffer buffer) throws IOException {
         while (buffer.hasRemaining()) {
             if (file.read(buffer, place + buffer.position()) < 0) {
-                throw new Refused(Defect.in("", "zip-truncated"));
+                throw truncated();
             }
         }
-        return buffer.flip();
+    }
+
+    private static Refused truncated() {
+        return new Refused(Defect.in("", "zip-truncated"));
     }
 
     /** Whether a signature stands at a place. */

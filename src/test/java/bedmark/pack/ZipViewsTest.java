@@ -9,6 +9,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -25,6 +26,7 @@ class ZipViewsTest {
     @TempDir
     Path folder;
     private final List<PackEntry> own = new ArrayList<>();
+    private final Map<String, byte[]> kept = new HashMap<>();
     private Path file;
     private ZipForge forge;
 
@@ -41,9 +43,13 @@ class ZipViewsTest {
                 Optional.empty())));
     }
 
+    private PackContent content() {
+        return new PackContent(own, Map.of(), kept);
+    }
+
     private void differ() {
         assertEquals("zip-views-differ", assertThrows(Refused.class,
-                () -> ZipViews.check(file, own, NO_WORK)).defect().code());
+                () -> ZipViews.check(file, content(), NO_WORK)).defect().code());
     }
 
     private void withOwn(int index, UnaryOperator<PackEntry> change) {
@@ -52,7 +58,7 @@ class ZipViewsTest {
 
     @Test
     void viewsThatAgreeAreAccepted() throws IOException {
-        ZipViews.check(file, own, NO_WORK);
+        ZipViews.check(file, content(), NO_WORK);
     }
 
     @Test
@@ -66,6 +72,16 @@ class ZipViewsTest {
     void otherContentIsNoticed() {
         withOwn(2, entry -> new PackEntry(entry.slot(), entry.name(), own.get(0).digests(), entry.doubt()));
         differ();
+    }
+
+    @Test
+    void otherContentOfAFileThatIsKeptIsNoticed() throws IOException {
+        kept.put("c", BagForge.text("three"));
+        ZipViews.check(file, content(), NO_WORK);
+        for (String other : List.of("thre", "threee", "thrie", "", "hree")) {
+            kept.put("c", BagForge.text(other));
+            differ();
+        }
     }
 
     @Test

@@ -70,9 +70,9 @@ final class Link implements AutoCloseable {
         });
     }
 
-    /** Texts as one argument, for {@code = any(?)}. */
+    /** Texts as one argument, each once. */
     Array texts(Collection<String> texts) {
-        return guarded(() -> connection.createArrayOf("varchar", texts.toArray()));
+        return guarded(() -> connection.createArrayOf("varchar", texts.stream().distinct().toArray()));
     }
 
     /** Does work whole, or not at all. */

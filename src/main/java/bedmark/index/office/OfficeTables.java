@@ -35,6 +35,9 @@ public final class OfficeTables implements AutoCloseable {
     private static final String NEW_ZONE = "insert into zone (plant_name, area, conveyor, conveyor_tag, tag, asset, "
             + "material, registered, zone, plant, transfer, clashes, clock_wrong, judged) "
             + "values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, 0, false, true)";
+    private static final String STALE = "update zone set judged = false where zone = ?";
+    /** Many values are joined: a database that finds rows by an index would compare each with all of them once more. */
+    private static final String WANTED = " from unnest(cast(? as varchar array)) as wanted (wanted) join ";
     private static final String STANDS = "update zone set visit = ?, visit_status = ?, visited = ?, latest = ?, "
             + "moment = ?, clashes = ?, clock_wrong = ?, judged = ?, level = null where zone = ?";
     private static final String JUDGED = "update zone set judged = true, level = ?, incomplete = ?, drive_share = ?, "
@@ -184,7 +187,7 @@ public final class OfficeTables implements AutoCloseable {
         Map<String, CopyRow> fresh = new LinkedHashMap<>();
         rows.forEach(row -> fresh.putIfAbsent(row.copy().digest(), row));
         Map<String, Copy> known = new HashMap<>();
-        link.rows("select " + CopyRow.COLUMNS + " from survey where digest = any(?)", CopyRow::read,
+        link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on digest = wanted", CopyRow::read,
                 link.texts(fresh.keySet())).forEach(copy -> known.put(copy.digest(), copy));
         Set<String> touched = new HashSet<>();
         for (CopyRow row : rows) {
@@ -212,7 +215,7 @@ public final class OfficeTables implements AutoCloseable {
 
     /** Everything that came about some zones. */
     public List<Copy> copies(Collection<ZoneId> zones) {
-        return link.rows("select " + CopyRow.COLUMNS + " from survey where zone = any(?)", CopyRow::read,
+        return link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on zone = wanted", CopyRow::read,
                 link.texts(zones.stream().map(ZoneId::key).toList()));
     }
 
@@ -224,14 +227,14 @@ public final class OfficeTables implements AutoCloseable {
 
     /** What loaded the same drives as some contents. */
     public List<Copy> companions(Collection<Copy> copies) {
-        return link.rows("select " + CopyRow.COLUMNS + " from survey where drive = any(?)", CopyRow::read,
+        return link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on drive = wanted", CopyRow::read,
                 link.texts(copies.stream().map(CopyRow::drive).distinct().toList()));
     }
 
     /** The contents with those digests. */
     public Map<String, Copy> copiesOf(Collection<String> digests) {
         Map<String, Copy> copies = new HashMap<>();
-        link.rows("select " + CopyRow.COLUMNS + " from survey where digest = any(?)", CopyRow::read,
+        link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on digest = wanted", CopyRow::read,
                 link.texts(digests)).forEach(copy -> copies.put(copy.digest(), copy));
         return copies;
     }
@@ -239,7 +242,7 @@ public final class OfficeTables implements AutoCloseable {
     /** The documents with those digests. */
     public Map<String, byte[]> contents(Collection<String> digests) {
         Map<String, byte[]> contents = new HashMap<>();
-        link.rows("select digest, content from survey where digest = any(?)", row ->
+        link.rows("select digest, content" + WANTED + "survey on digest = wanted", row ->
                 contents.put(row.getString(1), sound(row.getString(1), row.getBytes(2))), link.texts(digests));
         return contents;
     }
@@ -256,8 +259,11 @@ public final class OfficeTables implements AutoCloseable {
     }
 
     private void stale(Collection<String> drives) {
-        link.run("update zone set judged = false where latest in (select digest from survey where drive = any(?))",
-                link.texts(drives));
+        link.rows("select z.zone, z.judged" + WANTED
+                + "survey s on s.drive = wanted join zone z on z.latest = s.digest",
+                row -> row.getBoolean(2) ? Optional.of(row.getString(1)) : Optional.<String>empty(),
+                link.texts(drives)).stream().flatMap(Optional::stream).forEach(zone -> link.batch(STALE, zone));
+        link.runBatch(STALE);
     }
 
     /** Names zones; those that are not there are made, those of the plant that are not named are out of register. */
@@ -288,7 +294,7 @@ public final class OfficeTables implements AutoCloseable {
     /** Makes rows for those of the zones that have none: today's register does not name them. */
     public void addUnnamed(Collection<ZoneId> zones, String plantName) {
         Set<ZoneId> unnamed = new TreeSet<>(zones);
-        link.rows("select zone from zone where zone = any(?)", row -> ZoneId.ofKey(row.getString(1)),
+        link.rows("select zone" + WANTED + "zone on zone = wanted", row -> ZoneId.ofKey(row.getString(1)),
                 link.texts(zones.stream().map(ZoneId::key).toList())).forEach(unnamed::remove);
         unnamed.forEach(zone -> link.batch(NEW_ZONE, plantName, "", "", "", zone.transfer(), "", "", false, zone.key(),
                 zone.plant(), zone.transfer()));
@@ -307,13 +313,13 @@ public final class OfficeTables implements AutoCloseable {
 
     /** Those of the zones that hold contents that clash. */
     public List<ZoneId> clashing(Collection<ZoneId> zones) {
-        return link.rows("select zone from zone where zone = any(?) and clashes > 0",
+        return link.rows("select zone" + WANTED + "zone on zone = wanted where clashes > 0",
                 row -> ZoneId.ofKey(row.getString(1)), link.texts(zones.stream().map(ZoneId::key).toList()));
     }
 
     /** Which of these contents are here. */
     public Set<String> known(Collection<String> digests) {
-        return new HashSet<>(link.rows("select digest from survey where digest = any(?)", row -> row.getString(1),
+        return new HashSet<>(link.rows("select digest" + WANTED + "survey on digest = wanted", row -> row.getString(1),
                 link.texts(digests)));
     }
 

@@ -7,22 +7,22 @@ import javafx.stage.DirectoryChooser;
 import javafx.stage.FileChooser;
 import javafx.stage.Stage;
 
-<<<<<<< HEAD
-/** Asks by the dialogs of the machine, over one window. */
+/** Asks by the dialogs of the machine, over one window; nothing is asked before that is there. */
 public final class StageChoice implements FolderChoice {
-    private final Stage stage;
+    private Stage stage;
 
+    /** Asks over a window that is there. */
     public StageChoice(Stage stage) {
         this.stage = stage;
-=======
-/** Asks by the dialogs of the machine, over one window; nothing is asked before that is there. */
-final class StageChoice implements FolderChoice {
-    private Stage stage;
+    }
+
+    /** Asks over the window that is still to come. */
+    StageChoice() {
+    }
 
     /** From now on asks over that window. Called by the screen. */
     void over(Stage window) {
         stage = window;
->>>>>>> start
     }
 
     @Override

@@ -63,7 +63,7 @@ public final class Rehearsal {
                 new Words(Locale.ENGLISH), (folder, samples, load) -> {
                     BedmarkApp.prepare(store, clock);
                     return true;
-                }));
+                }, (file, kind) -> false));
     }
 
     private static void delete(Path folder) throws IOException {

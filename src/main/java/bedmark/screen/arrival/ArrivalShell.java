@@ -61,7 +61,7 @@ public final class ArrivalShell {
 
     private void show() {
         Preferences preferences = model.preferences();
-        Theme.apply(scene, preferences.lighting().at(LocalTime.now(model.clock())), density(preferences));
+        Theme.applyOffice(scene, preferences.lighting().at(LocalTime.now(model.clock())), density(preferences));
         view.ifPresent(ArrivalView::left);
         ArrivalView shown = new ArrivalView(model, close, toOffice, 
                 new HBox(language(preferences), light(preferences)));

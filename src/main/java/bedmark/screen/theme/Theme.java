@@ -15,25 +15,21 @@ import javafx.scene.Scene;
 public final class Theme {
     /** The sheets that hold the look, in their order; lengths in them are those of the glass. */
     static final List<String> SHEETS = List.of("theme.css", "parts.css", "controls.css", "screens.css", "walk.css",
-<<<<<<< HEAD
             "arrival.css", "office.css");
-=======
-            "office.css");
-    private static final List<String> OF_TABLET = SHEETS.subList(0, SHEETS.size() - 1);
->>>>>>> start
+    private static final List<String> OF_TABLET = SHEETS.subList(0, SHEETS.indexOf("arrival.css"));
 
     private Theme() {
     }
 
     /**
-     * Dresses a scene of the tablet, or dresses it anew; its style sheets are replaced. Pop-ups that it opens take them over, so the
-     * light and the sizes are written into the sheets and do not hang on the scene's own root.
+     * Dresses a scene of the tablet, or dresses it anew; its style sheets are replaced. Pop-ups that it opens take them
+     * over, so the light and the sizes are written into the sheets and do not hang on the scene's own root.
      */
     public static void apply(Scene scene, Light light, Density density) {
         apply(scene, light, density, OF_TABLET);
     }
 
-    /** The same for a scene of the office, which has rooms that no tablet has. */
+    /** The same for a scene of the office, or of what arrives there: it has rooms that no tablet has. */
     public static void applyOffice(Scene scene, Light light, Density density) {
         apply(scene, light, density, SHEETS);
     }

@@ -13,8 +13,8 @@ import java.util.Map;
 import java.util.Optional;
 
 /**
- * What the windows of a measurement stand on: a display that was started for them where the machine has a server for one,
- * else the glass that draws without a display.
+ * What the windows of a measurement stand on: a display that was started for them where the machine has a server for
+ * one, else the glass that draws without a display.
  *
  * @param words   what it is, for the row
  * @param flags   what a virtual machine is told of it

@@ -22,7 +22,7 @@ import javafx.stage.Window;
  */
 public final class StartProbe {
     private static final long LOOK_MILLIS = 1;
-    /** The goal that is reached by going on with a walk, and its end by the battery instead of by closing the window. */
+    /** The goal that is reached by going on with a walk; and an end by the battery instead of by closing the window. */
     private static final String ROUND = "search";
     private static final String CUT = "cut";
     private static final double NANOS_TO_MILLI = 1e6;

@@ -75,8 +75,8 @@ public final class BedmarkApp extends Application {
     }
 
     /**
-     * Starts the toolkit and lets it read the typeface and the style sheets while the caller opens a store, since neither
-     * needs the other. Where there is no display, {@link #open} says so.
+     * Starts the toolkit and lets it read the typeface and the style sheets while the caller opens a store, since
+     * neither needs the other. Where there is no display, {@link #open} says so.
      *
      * @param folder the store's; how the person likes the tablet lies there
      */

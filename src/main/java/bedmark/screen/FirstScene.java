@@ -41,8 +41,8 @@ record FirstScene(Scene scene, BorderPane root) {
     }
 
     /**
-     * A scene in the person's colours that has shown, unseen, the parts that a first screen is made of: what is read and
-     * made for them the first time is there when the store is open. Called by the screen.
+     * A scene in the person's colours that has shown, unseen, the parts that a first screen is made of: what is read
+     * and made for them the first time is there when the store is open. Called by the screen.
      */
     static FirstScene ready(Preferences preferences, Clock clock, double width, double height) {
         FirstScene made = plain(width, height);

@@ -87,8 +87,8 @@ public final class Shell implements Navigator {
     }
 
     /**
-     * The round that a program which ended in the midst of a walk goes on with. Touches no screen, so that it can be read
-     * before there is one.
+     * The round that a program which ended in the midst of a walk goes on with. Touches no screen, so that it can be
+     * read before there is one.
      */
     static Optional<RoundModel> goingOn(Workplace workplace) {
         try {
@@ -266,7 +266,8 @@ public final class Shell implements Navigator {
 
     private void showRound(RoundModel round) {
         walked = Optional.of(round);
-        show(() -> new RoundView(workplace, round, this));
+        show(() -> new RoundView(workplace, round, this, screen == null ? RoundView.First.IN_SIGHT
+                : RoundView.First.ALL));
     }
 
     @Override

@@ -13,8 +13,9 @@ import java.time.temporal.ChronoUnit;
 import java.util.Optional;
 
 /**
- * The walk that a person set out on, remembered beside the store: a program that ended in its midst, as when the battery
- * died, goes on there, since the safety card is acknowledged once a walk. Losing the file loses no more than that.
+ * The walk that a person set out on, remembered beside the store: a program that ended in its midst, as when the
+ * battery died, goes on there, since the safety card is acknowledged once a walk. Losing the file loses no more than
+ * that.
  */
 public final class WalkMemory {
     static final String FILE = "walk.json";

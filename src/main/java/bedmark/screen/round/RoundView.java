@@ -52,6 +52,13 @@ public final class RoundView extends SidedScreen {
     private static final int AHEAD = 9;
     private static final int AT_A_TIME = 4;
 
+    /** Which stops are built before the screen is first drawn. */
+    public enum First {
+        /** Those around the next one, since nothing is drawn yet and the person waits; the others follow. */
+        IN_SIGHT,
+        ALL
+    }
+
     private final Workplace workplace;
     private final RoundModel model;
     private final Navigator navigator;
@@ -65,7 +72,7 @@ public final class RoundView extends SidedScreen {
     private int to;
     private final CustomTextField search = new CustomTextField();
 
-    public RoundView(Workplace workplace, RoundModel model, Navigator navigator) {
+    public RoundView(Workplace workplace, RoundModel model, Navigator navigator, First first) {
         super("summary");
         this.workplace = workplace;
         this.model = model;
@@ -87,7 +94,8 @@ public final class RoundView extends SidedScreen {
         side.getStyleClass().add("summary");
         body.getStyleClass().add("round-body");
         body.setCenter(stops);
-        listening.to(model.shownProperty(), rows -> layOut());
+        layOut(first);
+        listening.onChange(model.shownProperty(), rows -> layOut(First.ALL));
         listening.onChange(model.rowsProperty(), rows -> summarise());
         summarise();
     }
@@ -127,13 +135,12 @@ public final class RoundView extends SidedScreen {
         return search;
     }
 
-    /** All stops; the first time those in sight, and the others once they are drawn. */
-    private void layOut() {
-        boolean first = list.getChildren().isEmpty();
+    private void layOut(First built) {
         List<RoundRow> rows = model.shownProperty().get();
-        int next = first ? model.nextToDo("").map(rows::indexOf).orElse(0) : 0;
-        from = first ? Math.max(0, next - BEFORE) : 0;
-        to = first ? Math.min(rows.size(), Math.max(0, next) + AHEAD) : rows.size();
+        boolean some = built == First.IN_SIGHT;
+        int next = some ? Math.max(0, model.nextToDo("").map(rows::indexOf).orElse(0)) : 0;
+        from = some ? Math.max(0, next - BEFORE) : 0;
+        to = some ? Math.min(rows.size(), next + AHEAD) : rows.size();
         list.getChildren().setAll(lines(rows, from, to));
         whole();
     }
@@ -150,7 +157,7 @@ public final class RoundView extends SidedScreen {
         return lines;
     }
 
-    /** Takes more stops into the list: those behind it, then those before it; a few at a time, so that presses get their turn. */
+    /** Takes more stops into the list, behind and then before it; a few at a time, so that presses get their turn. */
     private void fillSome() {
         List<RoundRow> rows = model.shownProperty().get();
         if (list.getScene() == null || from == 0 && to == rows.size()) {
@@ -199,7 +206,7 @@ public final class RoundView extends SidedScreen {
             VBox names = new VBox(tag, note);
             HBox.setHgrow(names, Priority.ALWAYS);
             ActionButton withdraw = new ActionButton(Weight.QUIET, wording.text("walk.withdraw"),
-                    () -> model.withdraw(proposal, this::layOut));
+                    () -> model.withdraw(proposal, () -> layOut(First.ALL)));
             withdraw.setId("withdraw-" + i);
             withdraw.setAccessibleText(wording.text("walk.withdraw") + ": " + tag.getText());
             withdraw.getStyleClass().add("secondary-target");
@@ -219,7 +226,7 @@ public final class RoundView extends SidedScreen {
     private void propose() {
         ProposalForm form = new ProposalForm(wording, model, () -> {
             stops.getChildren().setAll(finder(), scroll);
-            layOut();
+            layOut(First.ALL);
         });
         stops.getChildren().setAll(form);
         form.begin();

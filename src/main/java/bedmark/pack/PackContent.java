@@ -41,7 +41,7 @@ record PackContent(List<PackEntry> all, Map<String, PackEntry> files, Map<String
             try (DigestStream content = new DigestStream(new EntryStream(bytes, slot), algorithms, work)) {
                 Optional<Defect> doubt = Optional.empty();
                 if (isKept(slot, name, limits)) {
-                    kept.put(name, content.readAllBytes());
+                    kept.put(name, whole(content, slot));
                 } else if (!slot.folder()) {
                     doubt = PhotoHeader.doubt(EntryName.shown(name), content, limits)
                             .filter(defect -> Bag.isPhoto(name) || defect.code().equals("zip-nested-archive"));
@@ -54,6 +54,13 @@ record PackContent(List<PackEntry> all, Map<String, PackEntry> files, Map<String
             }
         }
         return new PackContent(all, files, kept);
+    }
+
+    /** As long as it is announced to be; the stream refuses whatever is shorter or longer. */
+    private static byte[] whole(DigestStream content, ZipSlot slot) throws IOException {
+        byte[] bytes = new byte[(int) slot.size()];
+        content.readNBytes(bytes, 0, bytes.length);
+        return bytes;
     }
 
     private static boolean isKept(ZipSlot slot, String name, PackLimits limits) {

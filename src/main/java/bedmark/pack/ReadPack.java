@@ -22,10 +22,11 @@ public final class ReadPack {
     private final Fingerprint fingerprint;
     private final Map<PackedPhoto, ZipSlot> photos;
 
+    /** @param bundleText nobody else's from now on */
     ReadPack(Path file, byte[] bundleText, Bundle bundle, Fingerprint fingerprint,
              Map<PackedPhoto, ZipSlot> photos) {
         this.file = file;
-        this.bundleText = bundleText.clone();
+        this.bundleText = bundleText;
         this.bundle = bundle;
         this.fingerprint = fingerprint;
         this.photos = Collections.unmodifiableMap(new LinkedHashMap<>(photos));

@@ -36,6 +36,8 @@ class CodesTest {
         codes(Side.values(), Side::code, Side::ofCode);
         codes(Instrument.values(), Instrument::code, Instrument::ofCode);
         codes(Rule.values(), Rule::code, Rule::ofCode);
+        codes(MethodSpread.Cause.values(), MethodSpread.Cause::code, code -> Stream.of(MethodSpread.Cause.values())
+                .filter(cause -> cause.code().equals(code)).findFirst());
         codes(Component.values(), Component::code, code -> Stream.of(Component.values())
                 .filter(component -> component.code().equals(code)).findFirst());
         codes(Level.values(), Level::code, code -> Stream.of(Level.values())

@@ -8,6 +8,7 @@ import bedmark.index.SurveyLine;
 import bedmark.index.SurveyQuery;
 import bedmark.quantity.Quantity;
 import bedmark.screen.part.FieldBox;
+import bedmark.screen.part.Named;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.QueueState;
 import java.nio.file.Files;
@@ -249,7 +250,7 @@ class WalkTest {
     private void tabTo(String id, KeyCode... step) throws Exception {
         for (int i = 0; i < MOST_TABS; i++) {
             Node focused = app.shell().scene().getFocusOwner();
-            if (focused != null && id.equals(focused.getId())) {
+            if (focused != null && Named.is(focused, id)) {
                 return;
             }
             app.press(step);

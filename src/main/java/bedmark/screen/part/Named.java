@@ -17,9 +17,14 @@ public final class Named {
         node.getProperties().put(Named.class, name);
     }
 
+    /** Whether a node goes by a name, or by an id. */
+    public static boolean is(Node node, String name) {
+        return name.equals(node.getId()) || node.hasProperties() && name.equals(node.getProperties().get(Named.class));
+    }
+
     /** The first node at or below another that goes by a name, or by an id. */
     public static Optional<Node> find(Node root, String name) {
-        if (name.equals(root.getId()) || root.hasProperties() && name.equals(root.getProperties().get(Named.class))) {
+        if (is(root, name)) {
             return Optional.of(root);
         }
         if (root instanceof Parent parent) {

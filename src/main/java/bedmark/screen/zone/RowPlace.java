@@ -1,6 +1,8 @@
 package bedmark.screen.zone;
 
 import bedmark.wording.Wording;
+import java.util.HashMap;
+import java.util.Map;
 import java.util.Optional;
 import javafx.scene.layout.StackPane;
 
@@ -12,8 +14,7 @@ final class RowPlace extends StackPane {
     private final boolean quiet;
     private Optional<RowView> view = Optional.empty();
     private boolean upright;
-    private double widthAsked = Double.NaN;
-    private double heightKnown;
+    private final Map<Double, Double> heights = new HashMap<>();
 
     /** @param quiet whether what is to be said of the row is said elsewhere */
     RowPlace(SlotRow row, ZoneModel model, Wording wording, boolean quiet) {
@@ -55,18 +56,19 @@ final class RowPlace extends StackPane {
 
     @Override
     public void requestLayout() {
-        widthAsked = Double.NaN;
+        heights.clear();
         super.requestLayout();
     }
 
-    /** A key changes one row; the list asks all of them how high they are. */
+    /** A key changes one row; the list asks all of them how high they are, at its own width and at any. */
     @Override
     protected double computePrefHeight(double width) {
-        if (width != widthAsked) {
-            heightKnown = super.computePrefHeight(width);
-            widthAsked = width;
+        Double known = heights.get(width);
+        if (known == null) {
+            known = super.computePrefHeight(width);
+            heights.put(width, known);
         }
-        return heightKnown;
+        return known;
     }
 
     /** Shows what the survey holds now, where the row is built. */

@@ -4,6 +4,7 @@ import bedmark.screen.theme.LevelGlyph;
 import bedmark.screen.theme.LevelShape;
 import java.util.List;
 import java.util.stream.Stream;
+import javafx.css.PseudoClass;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
@@ -16,6 +17,9 @@ import javafx.scene.layout.VBox;
 
 /** The verdict on the spot: shape, sentence, how sure, four numbers, one action. */
 public final class VerdictBlock extends VBox {
+    private static final PseudoClass OVERLOADED = PseudoClass.getPseudoClass(LevelShape.OVERLOADED.styleClass());
+    private static final PseudoClass NOT_INSPECTED = PseudoClass.getPseudoClass(LevelShape.NOT_INSPECTED.styleClass());
+
     private final LevelGlyph glyph = new LevelGlyph(LevelShape.INCOMPLETE);
     private final Label sentence = Labels.wrapped("sentence", "");
     private final Label sure = Labels.wrapped("sure", "");
@@ -66,7 +70,6 @@ public final class VerdictBlock extends VBox {
         if (verdict.equals(shown)) {
             return;
         }
-        boolean other = shown == null || shown.level() != verdict.level();
         for (int i = 0; i < remarkLines.size(); i++) {
             remarkLines.get(i).show(verdict.remarks().stream().skip(i).findFirst());
         }
@@ -78,9 +81,9 @@ public final class VerdictBlock extends VBox {
         // The number over its words: the column beside the sentence stays narrow.
         sure.setText(verdict.sure().replaceFirst("% ", "%\n"));
         advice.setText(verdict.advice().orElse(""));
-        if (other) {
-            getStyleClass().setAll("verdict", verdict.level().styleClass());
-        }
+        // Only the sentence is dressed by the level: a class on the block would have all of it dressed anew.
+        sentence.pseudoClassStateChanged(OVERLOADED, verdict.level() == LevelShape.OVERLOADED);
+        sentence.pseudoClassStateChanged(NOT_INSPECTED, verdict.level() == LevelShape.NOT_INSPECTED);
         numbers.setVisible(!verdict.figures().isEmpty());
         numbers.setManaged(!verdict.figures().isEmpty());
         for (int i = 0; i < figures.size(); i++) {

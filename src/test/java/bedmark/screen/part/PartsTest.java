@@ -84,9 +84,11 @@ class PartsTest {
             VerdictBlock block = new VerdictBlock(List.of());
             block.show(Samples.OVERLOADED);
             assertTrue(block.getAccessibleText().startsWith("overloaded. Overloaded: the bed"));
+            PseudoClass overloaded = PseudoClass.getPseudoClass("overloaded");
+            assertTrue(block.lookup(".sentence").getPseudoClassStates().contains(overloaded));
             block.show(Samples.INCOMPLETE);
-            assertTrue(block.getStyleClass().contains("incomplete"));
-            assertFalse(block.getStyleClass().contains("overloaded"));
+            assertTrue(block.getAccessibleText().startsWith("incomplete. "));
+            assertFalse(block.lookup(".sentence").getPseudoClassStates().contains(overloaded));
             return "";
         });
     }

@@ -33,13 +33,7 @@ public final class Rehearsal {
         Clock clock = Clock.systemUTC();
         begin(store, clock);
         try (TabletApp app = new TabletApp(store, samples, stick, clock, 1280, 800)) {
-            app.click("load-demo");
-            app.until(() -> app.has("person"));
-            app.click("person");
-            app.type("A. Vale");
-            app.click("caution-read");
-            app.click("start-walk");
-            app.until(() -> app.has("search"));
+            app.setOutOnDemo();
             app.click("stop-TP-22");
             app.until(() -> app.has("verdict"));
             app.type("5");

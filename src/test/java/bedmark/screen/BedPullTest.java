@@ -34,13 +34,7 @@ class BedPullTest {
         try (TabletApp opened = new TabletApp(temp.resolve("store"), Optional.of(Path.of("sample-surveys")), temp,
                 Clock.systemUTC(), 1280, 800)) {
             app = opened;
-            app.click("load-demo");
-            app.until(() -> app.has("person"));
-            app.click("person");
-            app.type("A. Vale");
-            app.click("caution-read");
-            app.click("start-walk");
-            app.until(() -> app.has("search"));
+            app.setOutOnDemo();
             app.click("stop-" + TRANSFER);
             app.until(() -> app.has("verdict"));
             app.type("5.2");

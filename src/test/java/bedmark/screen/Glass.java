@@ -14,10 +14,14 @@ import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.ExecutionException;
 import java.util.function.Supplier;
 import javafx.application.Platform;
+import javafx.geometry.Bounds;
 import javafx.geometry.Rectangle2D;
+import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
 import javafx.scene.SnapshotParameters;
+import javafx.scene.control.Labeled;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.image.PixelFormat;
 import javafx.scene.image.WritableImage;
 import javafx.scene.paint.Color;
@@ -54,6 +58,36 @@ public final class Glass {
                 throw error;
             }
             throw (Exception) e.getCause();
+        }
+    }
+
+    /** Moves the panes that a node is in so far that it is in sight; on the screen's thread. */
+    public static void reveal(Node node) {
+        for (Parent parent = node.getParent(); parent != null; parent = parent.getParent()) {
+            if (parent instanceof ScrollPane scroll) {
+                double room = scroll.getViewportBounds().getHeight();
+                double all = scroll.getContent().getBoundsInLocal().getHeight();
+                Bounds bounds = scroll.getContent().sceneToLocal(node.localToScene(node.getBoundsInLocal()));
+                if (all > room) {
+                    scroll.setVvalue(Math.max(0, Math.min(1, (bounds.getCenterY() - room / 2) / (all - room))));
+                }
+            }
+        }
+    }
+
+    /** Everything that is written at or below a node and seen; on the screen's thread. */
+    public static String words(Node node) {
+        StringBuilder words = new StringBuilder();
+        collect(node, words);
+        return words.toString();
+    }
+
+    private static void collect(Node node, StringBuilder words) {
+        if (node instanceof Labeled labeled && node.isVisible()) {
+            words.append(labeled.getText()).append('\n');
+        }
+        if (node instanceof Parent parent) {
+            parent.getChildrenUnmodifiable().forEach(child -> collect(child, words));
         }
     }
 

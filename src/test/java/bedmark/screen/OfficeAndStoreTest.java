@@ -81,13 +81,7 @@ class OfficeAndStoreTest {
     }
 
     private void start() throws Exception {
-        app.click("load-demo");
-        app.until(() -> app.has("person"));
-        app.click("person");
-        app.type("A. Vale");
-        app.click("caution-read");
-        app.click("start-walk");
-        app.until(() -> app.has("search"));
+        app.setOutOnDemo();
     }
 
     @Test

@@ -59,13 +59,7 @@ class OwnFieldsTest {
         try (TabletApp opened = new TabletApp(temp.resolve("store"), Optional.of(samples), stick, Clock.systemUTC(),
                 1280, 800)) {
             app = opened;
-            app.click("load-demo");
-            app.until(() -> app.has("person"));
-            app.click("person");
-            app.type("A. Vale");
-            app.click("caution-read");
-            app.click("start-walk");
-            app.until(() -> app.has("search"));
+            app.setOutOnDemo();
             app.click("stop-" + TRANSFER);
             app.click("correct");
             app.until(() -> !app.has("correct"));

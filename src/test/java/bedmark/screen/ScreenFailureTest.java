@@ -37,13 +37,7 @@ class ScreenFailureTest {
             Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> app.shell().failed(failure));
             return null;
         });
-        app.click("load-demo");
-        app.until(() -> app.has("person"));
-        app.click("person");
-        app.type("A. Vale");
-        app.click("caution-read");
-        app.click("start-walk");
-        app.until(() -> app.has("search"));
+        app.setOutOnDemo();
     }
 
     @AfterEach

@@ -9,11 +9,8 @@ import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 import javafx.application.Platform;
-import javafx.geometry.Bounds;
 import javafx.scene.Node;
-import javafx.scene.Parent;
 import javafx.scene.control.Labeled;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.testfx.api.FxRobot;
@@ -85,29 +82,27 @@ public final class TabletApp implements AutoCloseable {
         settle();
     }
 
+    /** Loads the demo plant into the empty store, and sets out on its round. */
+    public void setOutOnDemo() throws Exception {
+        click("load-demo");
+        until(() -> has("person"));
+        click("person");
+        type("A. Vale");
+        click("caution-read");
+        click("start-walk");
+        until(() -> has("search"));
+    }
+
     /** Clicks the node with an id; a list is first moved so far that it is in sight. */
     public void click(String id) throws Exception {
         Node node = node(id);
         Glass.on(() -> {
-            reveal(node);
+            Glass.reveal(node);
             return null;
         });
         settle();
         robot.clickOn(node);
         settle();
-    }
-
-    private static void reveal(Node node) {
-        for (Parent parent = node.getParent(); parent != null; parent = parent.getParent()) {
-            if (parent instanceof ScrollPane scroll) {
-                double room = scroll.getViewportBounds().getHeight();
-                double all = scroll.getContent().getBoundsInLocal().getHeight();
-                Bounds bounds = scroll.getContent().sceneToLocal(node.localToScene(node.getBoundsInLocal()));
-                if (all > room) {
-                    scroll.setVvalue(Math.max(0, Math.min(1, (bounds.getCenterY() - room / 2) / (all - room))));
-                }
-            }
-        }
     }
 
     /** Types with the keyboard, wherever the focus is. */

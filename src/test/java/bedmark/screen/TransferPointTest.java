@@ -47,13 +47,7 @@ class TransferPointTest {
     void walkBegins() throws Exception {
         app = new TabletApp(temp.resolve("store"), Optional.of(Path.of("sample-surveys")), temp, Clock.systemUTC(),
                 1280, 800);
-        app.click("load-demo");
-        app.until(() -> app.has("person"));
-        app.click("person");
-        app.type("A. Vale");
-        app.click("caution-read");
-        app.click("start-walk");
-        app.until(() -> app.has("search"));
+        app.setOutOnDemo();
         app.click("stop-" + FRESH);
         app.until(() -> app.has("verdict"));
     }

@@ -29,13 +29,7 @@ class WalkResumedTest {
     @BeforeEach
     void setOut() throws Exception {
         open(Duration.ZERO);
-        app.click("load-demo");
-        app.until(() -> app.has("person"));
-        app.click("person");
-        app.type("A. Vale");
-        app.click("caution-read");
-        app.click("start-walk");
-        app.until(() -> app.has("search"));
+        app.setOutOnDemo();
     }
 
     private void open(Duration later) throws Exception {

@@ -97,13 +97,7 @@ class WorkingPaneTest {
         TabletApp opened = new TabletApp(temp.resolve("store-" + width), Optional.of(Path.of("sample-surveys")), temp,
                 Clock.systemUTC(), width, height);
         app = opened;
-        app.click("load-demo");
-        app.until(() -> app.has("person"));
-        app.click("person");
-        app.type("A. Vale");
-        app.click("caution-read");
-        app.click("start-walk");
-        app.until(() -> app.has("search"));
+        app.setOutOnDemo();
         app.click("stop-TP-08");
         app.until(() -> app.has("verdict"));
         return opened;

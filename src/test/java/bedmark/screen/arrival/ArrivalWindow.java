@@ -12,9 +12,7 @@ import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 import javafx.application.Platform;
 import javafx.scene.Node;
-import javafx.scene.Parent;
 import javafx.scene.Scene;
-import javafx.scene.control.Labeled;
 import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.testfx.api.FxRobot;
@@ -123,20 +121,7 @@ public final class ArrivalWindow implements AutoCloseable {
 
     /** Everything that is written on the screen. */
     String words() throws Exception {
-        return Glass.on(() -> {
-            StringBuilder words = new StringBuilder();
-            collect(shell.scene().getRoot(), words);
-            return words.toString();
-        });
-    }
-
-    private static void collect(Node node, StringBuilder words) {
-        if (node instanceof Labeled labeled && node.isVisible()) {
-            words.append(labeled.getText()).append('\n');
-        }
-        if (node instanceof Parent parent) {
-            parent.getChildrenUnmodifiable().forEach(child -> collect(child, words));
-        }
+        return Glass.on(() -> Glass.words(shell.scene().getRoot()));
     }
 
     @Override

@@ -10,11 +10,7 @@ import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 import javafx.application.Platform;
-import javafx.geometry.Bounds;
 import javafx.scene.Node;
-import javafx.scene.Parent;
-import javafx.scene.control.Labeled;
-import javafx.scene.control.ScrollPane;
 import javafx.stage.Stage;
 import org.testfx.api.FxRobot;
 import org.testfx.api.FxToolkit;
@@ -77,25 +73,12 @@ final class OfficeWindow implements AutoCloseable {
     void click(String id) throws Exception {
         Node node = node(id);
         Glass.on(() -> {
-            reveal(node);
+            Glass.reveal(node);
             return null;
         });
         settle();
         robot.clickOn(node);
         settle();
-    }
-
-    private static void reveal(Node node) {
-        for (Parent parent = node.getParent(); parent != null; parent = parent.getParent()) {
-            if (parent instanceof ScrollPane scroll) {
-                double room = scroll.getViewportBounds().getHeight();
-                double all = scroll.getContent().getBoundsInLocal().getHeight();
-                Bounds bounds = scroll.getContent().sceneToLocal(node.localToScene(node.getBoundsInLocal()));
-                if (all > room) {
-                    scroll.setVvalue(Math.max(0, Math.min(1, (bounds.getCenterY() - room / 2) / (all - room))));
-                }
-            }
-        }
     }
 
     void type(String text) throws TimeoutException {
@@ -109,20 +92,7 @@ final class OfficeWindow implements AutoCloseable {
 
     /** Everything that is written on the screen. */
     String words() throws Exception {
-        return Glass.on(() -> {
-            StringBuilder words = new StringBuilder();
-            collect(shell.scene().getRoot(), words);
-            return words.toString();
-        });
-    }
-
-    private static void collect(Node node, StringBuilder words) {
-        if (node instanceof Labeled labeled && node.isVisible()) {
-            words.append(labeled.getText()).append('\n');
-        }
-        if (node instanceof Parent parent) {
-            parent.getChildrenUnmodifiable().forEach(child -> collect(child, words));
-        }
+        return Glass.on(() -> Glass.words(shell.scene().getRoot()));
     }
 
     void picture(String name) throws Exception {

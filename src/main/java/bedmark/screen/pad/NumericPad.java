@@ -1,5 +1,6 @@
 package bedmark.screen.pad;
 
+import bedmark.screen.part.Island;
 import bedmark.screen.theme.Icon;
 import bedmark.screen.theme.IconView;
 import java.util.EnumMap;
@@ -54,7 +55,7 @@ public final class NumericPad extends StackPane {
         grid.getStyleClass().add("keys");
         Stream.of(PadKey.values()).forEach(this::key);
         layOut(ROWS);
-        getChildren().addAll(grid, note());
+        getChildren().addAll(new Island(grid), note());
         undoable.subscribe(can -> {
             undo = can;
             offer();

@@ -23,8 +23,6 @@ public final class FieldBox extends HBox {
     private static final PseudoClass ACTIVE = PseudoClass.getPseudoClass("active");
     private static final PseudoClass CARRIED = PseudoClass.getPseudoClass("carried");
     private static final PseudoClass FRESH = PseudoClass.getPseudoClass("fresh");
-    static final PseudoClass QUESTIONED = PseudoClass.getPseudoClass("questioned");
-    static final PseudoClass WRONG = PseudoClass.getPseudoClass("wrong");
 
     private final VBox lines = new VBox();
     private final HBox top = new HBox();
@@ -62,23 +60,22 @@ public final class FieldBox extends HBox {
         top.getChildren().addAll(this.name, beside);
         lines.getChildren().addAll(top, row);
         lines.setAlignment(Pos.CENTER_LEFT);
-        HBox.setHgrow(lines, Priority.ALWAYS);
         lines.setMinWidth(0);
         top.managedProperty().bind(this.name.textProperty().isNotEmpty());
         setAlignment(Pos.CENTER);
-        setFillHeight(false);
-        getChildren().add(lines);
+        Island island = new Island(lines);
+        HBox.setHgrow(island, Priority.ALWAYS);
+        getChildren().add(island);
         setMaxWidth(Double.MAX_VALUE);
         value.setMinWidth(Region.USE_PREF_SIZE);
         value.managedProperty().bind(value.textProperty().isNotEmpty());
+        // A value makes its line higher: that alone can change how high the box has to be.
+        value.managedProperty().subscribe(shown -> requestLayout());
         unit.setMinWidth(Region.USE_PREF_SIZE);
         active.subscribe(on -> pseudoClassStateChanged(ACTIVE, on));
         carried.subscribe(on -> pseudoClassStateChanged(CARRIED, on));
         fresh.subscribe(on -> pseudoClassStateChanged(FRESH, on));
-        judgement.subscribe(judged -> {
-            pseudoClassStateChanged(QUESTIONED, judged == Judgement.QUESTIONED);
-            pseudoClassStateChanged(WRONG, judged == Judgement.WRONG);
-        });
+        judgement.subscribe(judged -> judged.dress(this));
         // Taken here: the list that it stands in would take the focus for itself.
         setOnMousePressed(event -> {
             requestFocus();
@@ -102,6 +99,10 @@ public final class FieldBox extends HBox {
     /** Lets the value run over several lines with the ghost below it: it is words and no number. */
     public FieldBox ofWords() {
         getStyleClass().add("words");
+        setFillHeight(false);
+        lines.setManaged(true);
+        HBox.setHgrow(lines, Priority.ALWAYS);
+        getChildren().setAll(lines);
         lines.getChildren().add(ghost);
         for (Label label : List.of(value, ghost)) {
             label.setMinHeight(Region.USE_PREF_SIZE);

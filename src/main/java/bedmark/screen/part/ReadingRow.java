@@ -44,10 +44,7 @@ public final class ReadingRow extends VBox {
         getChildren().addAll(row, message);
         message.managedProperty().bind(message.visibleProperty());
         message.visibleProperty().bind(message.textProperty().isNotEmpty());
-        box.judgementProperty().subscribe(judged -> {
-            message.pseudoClassStateChanged(FieldBox.WRONG, judged == Judgement.WRONG);
-            message.pseudoClassStateChanged(FieldBox.QUESTIONED, judged == Judgement.QUESTIONED);
-        });
+        box.judgementProperty().subscribe(judged -> judged.dress(message));
     }
 
     public FieldBox box() {

@@ -5,6 +5,8 @@ import bedmark.form.Section;
 import bedmark.screen.Listening;
 import bedmark.screen.part.CautionStrip;
 import bedmark.screen.part.FieldBox;
+import bedmark.screen.part.Island;
+import bedmark.screen.part.Judgement;
 import bedmark.screen.part.SectionHeader;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
@@ -42,6 +44,9 @@ final class FormPane extends VBox {
     private int to;
     private boolean filling;
     private boolean upright;
+    /** Whether the active row has to be brought in sight once all rows have their places. */
+    private boolean revealing;
+    private final Runnable laidOut = this::laidOut;
 
     /** @param large whether large keys take the room: one row is shown, and what is said of it stands elsewhere */
     FormPane(ZoneModel model, Wording wording, Listening listening, boolean large) {
@@ -64,13 +69,17 @@ final class FormPane extends VBox {
             scroll.getStyleClass().add("one-row");
             getChildren().addAll(header, scroll);
         } else {
-            VBox.setVgrow(scroll, Priority.ALWAYS);
-            getChildren().addAll(header, scroll, caution);
+            Island room = new Island(scroll);
+            VBox.setVgrow(room, Priority.ALWAYS);
+            getChildren().addAll(new Island(header), room, caution);
         }
-        sceneProperty().addListener((property, before, now) -> fill());
-        // Rows that came in above the active one, or grew, have moved it; it is looked for once they have their places.
-        list.heightProperty().addListener((property, before, now) ->
-                Platform.runLater(() -> inHand.ifPresent(this::reveal)));
+        sceneProperty().addListener((property, before, now) -> {
+            Optional.ofNullable(before).ifPresent(scene -> scene.removePostLayoutPulseListener(laidOut));
+            Optional.ofNullable(now).ifPresent(scene -> scene.addPostLayoutPulseListener(laidOut));
+            fill();
+        });
+        // Rows that came in above the active one, or grew, have moved it.
+        list.heightProperty().addListener((property, before, now) -> revealing = true);
         listening.to(model.rowsProperty(), this::layOut);
         listening.onChange(model.keptProperty(), kept -> rows.forEach(RowPlace::update));
         listening.onChange(model.typedProperty(), typed -> typed());
@@ -153,7 +162,7 @@ final class FormPane extends VBox {
             row.applyCss();
         });
         if (!next.isEmpty() || from > 0 || to < rows.size()) {
-            inHand.ifPresent(this::reveal);
+            reveal();
             fill();
         }
     }
@@ -178,7 +187,7 @@ final class FormPane extends VBox {
     /** At glove size only what is wrong or doubtful is said beside the picture; how to read it is one tap away. */
     private void say(RowPlace row) {
         RowView.Said said = row.built().said();
-        aside.setText(said.tone().equals("help") ? "" : said.words());
+        aside.setText(said.judgement() == Judgement.NONE ? "" : said.words());
     }
 
     private void activated() {
@@ -196,7 +205,7 @@ final class FormPane extends VBox {
             header.titleProperty().set(title(row.row().section()));
             header.asideProperty().set(wording.text("screen.zone.place", index + 1, rows.size()));
             row.built().focusActive();
-            reveal(row);
+            reveal();
         });
         sayCaution();
     }
@@ -210,11 +219,21 @@ final class FormPane extends VBox {
         return active().flatMap(row -> row.built().activeBox());
     }
 
+    /** Brings the active row in sight in the frame that shows it: a layout of its own would cost as much as the key. */
+    private void reveal() {
+        revealing = true;
+        Platform.requestNextPulse();
+    }
+
+    private void laidOut() {
+        if (revealing) {
+            revealing = false;
+            inHand.ifPresent(this::reveal);
+        }
+    }
+
     /** Brings the row in sight with the one before it where there is room for both; no row is cut at the top. */
     private void reveal(RowPlace row) {
-        // Only this row can have changed its style; styling the whole form anew would cost more than the key's work.
-        row.applyCss();
-        layout();
         double room = scroll.getViewportBounds().getHeight();
         double all = list.getBoundsInLocal().getHeight();
         if (room <= 0 || all <= room) {
@@ -247,7 +266,7 @@ final class FormPane extends VBox {
     void focusActive() {
         active().ifPresent(row -> {
             row.built().focusActive();
-            reveal(row);
+            reveal();
         });
     }
 }

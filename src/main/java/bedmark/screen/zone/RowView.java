@@ -26,8 +26,6 @@ import javafx.scene.layout.VBox;
 
 /** One row of the form: its name, the boxes of its cells, the mark of its reading, and below it what is to be said. */
 final class RowView extends VBox {
-    private static final List<String> TONES = List.of("wrong", "questioned", "help");
-
     private final SlotRow row;
     private final ZoneModel model;
     private final Wording wording;
@@ -47,7 +45,7 @@ final class RowView extends VBox {
         this.quiet = quiet;
         this.words = new SlotWords(wording, model.setting().register());
         getStyleClass().add("reading-row");
-        message.getStyleClass().add("message");
+        message.getStyleClass().addAll("message", "help");
         message.setWrapText(true);
         message.managedProperty().bind(message.visibleProperty());
         message.visibleProperty().bind(message.textProperty().isNotEmpty());
@@ -165,10 +163,7 @@ final class RowView extends VBox {
         }
         Said said = said();
         message.setText(quiet ? "" : said.words());
-        if (!message.getStyleClass().contains(said.tone())) {
-            message.getStyleClass().removeAll(TONES);
-            message.getStyleClass().add(said.tone());
-        }
+        said.judgement().dress(message);
         carry.ifPresent(button -> {
             button.setVisible(model.tables().carriesOverAt(row.field().key()));
             button.setManaged(button.isVisible());
@@ -177,7 +172,7 @@ final class RowView extends VBox {
     }
 
     /** What is said below a row, and how. */
-    record Said(String words, String tone) {
+    record Said(String words, Judgement judgement) {
     }
 
     /** What is to be said of the row: what is wrong or doubtful, else that it was taken over, else how it is read. */
@@ -185,13 +180,14 @@ final class RowView extends VBox {
         Optional<Note> note = holdsActive() ? model.noteProperty().get()
                 : row.slots().stream().flatMap(slot -> model.impossible(slot).stream()).findFirst();
         if (note.isPresent()) {
-            return new Said(sentence(note.get()), note.get().isWrong() ? "wrong" : "questioned");
+            return new Said(sentence(note.get()), judgement(note.get()));
         }
         if (row.slots().stream().anyMatch(model::carriedOver)) {
-            return new Said(wording.text("zone.carried-over"), "help");
+            return new Said(wording.text("zone.carried-over"), Judgement.NONE);
         }
         return new Said(holdsActive() && row.line().filter(line -> line > 1 || row.slots().size() < 3).isEmpty()
-                ? row.field().head().help().map(help -> help.in(wording.words().language())).orElse("") : "", "help");
+                ? row.field().head().help().map(help -> help.in(wording.words().language())).orElse("") : "",
+                Judgement.NONE);
     }
 
     private void update(Slot slot, FieldBox box) {
@@ -232,8 +228,12 @@ final class RowView extends VBox {
     }
 
     private Judgement judged(Slot slot, boolean active) {
-        return (active ? model.noteProperty().get() : model.impossible(slot))
-                .map(note -> note.isWrong() ? Judgement.WRONG : Judgement.QUESTIONED).orElse(Judgement.NONE);
+        return (active ? model.noteProperty().get() : model.impossible(slot)).map(RowView::judgement)
+                .orElse(Judgement.NONE);
+    }
+
+    private static Judgement judgement(Note note) {
+        return note.isWrong() ? Judgement.WRONG : Judgement.QUESTIONED;
     }
 
     private String sentence(Note note) {

@@ -26,7 +26,8 @@ public final class ZonePictureView extends Region {
     private static final double SLACK_MM = 1;
 
     private final Canvas canvas = new Canvas();
-    private final InkColours inks = new InkColours(this, this::requestLayout);
+    private final Paper paper = new Paper();
+    private final InkColours inks = new InkColours(this, paper::requestLayout);
     private final FontMeasure fonts = new FontMeasure();
     private final Density density;
     private final PullListener listener;
@@ -45,7 +46,8 @@ public final class ZonePictureView extends Region {
         getStyleClass().add("zone-picture");
         setAccessibleRole(AccessibleRole.IMAGE_VIEW);
         canvas.setManaged(false);
-        getChildren().add(canvas);
+        paper.setManaged(false);
+        getChildren().add(paper);
         setMinSize(density.mm(60), density.mm(30));
         addEventHandler(MouseEvent.MOUSE_PRESSED, this::press);
         addEventHandler(MouseEvent.MOUSE_DRAGGED, this::drag);
@@ -57,7 +59,7 @@ public final class ZonePictureView extends Region {
         sketch = changed;
         snap = steps;
         picture = pull.isPresent() ? picture.map(held -> held.pulledTo(changed)) : Optional.empty();
-        requestLayout();
+        paper.requestLayout();
     }
 
     /** Whether a finger pulls the belt rather than the bed. */
@@ -70,7 +72,7 @@ public final class ZonePictureView extends Region {
         if (corner != height) {
             corner = height;
             picture = Optional.empty();
-            requestLayout();
+            paper.requestLayout();
         }
     }
 
@@ -124,14 +126,28 @@ public final class ZonePictureView extends Region {
         pull = Optional.empty();
         ended.ifPresent(held -> tell(held, event, PullListener.Phase.RELEASED));
         picture = Optional.empty();
-        requestLayout();
+        paper.requestLayout();
         event.consume();
     }
 
     @Override
     protected void layoutChildren() {
-        double width = Math.floor(getWidth());
-        double height = Math.floor(getHeight());
+        paper.resizeRelocate(0, 0, getWidth(), getHeight());
+    }
+
+    /** What is drawn on: drawing anew is no matter of the layout around it. */
+    private final class Paper extends Region {
+        Paper() {
+            getChildren().add(canvas);
+        }
+
+        @Override
+        protected void layoutChildren() {
+            draw(Math.floor(getWidth()), Math.floor(getHeight()));
+        }
+    }
+
+    private void draw(double width, double height) {
         if (width < 1 || height < 1) {
             return;
         }

@@ -2,6 +2,7 @@ package bedmark;
 
 import bedmark.command.BedmarkCommand;
 import bedmark.command.Surroundings;
+import bedmark.document.Refused;
 import bedmark.index.Store;
 import bedmark.index.StoreFolder;
 import bedmark.index.StoreOptions;
@@ -9,7 +10,11 @@ import bedmark.office.OfficeOptions;
 import bedmark.office.OfficeStore;
 import bedmark.pack.FileKind;
 import bedmark.screen.BedmarkApp;
+import bedmark.screen.Preferences;
+import bedmark.screen.PreferencesFile;
+import bedmark.screen.RefusalWindow;
 import bedmark.screen.arrival.ArrivalApp;
+import bedmark.screen.arrival.ArrivalModel;
 import bedmark.screen.office.OfficeApp;
 import bedmark.words.Words;
 import java.io.PrintWriter;
@@ -18,6 +23,8 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.function.BooleanSupplier;
+import java.util.function.Supplier;
 import java.util.logging.Level;
 import java.util.logging.Logger;
 
@@ -43,19 +50,31 @@ public final class Bedmark {
         return !linux || System.getenv("DISPLAY") != null || System.getenv("WAYLAND_DISPLAY") != null;
     }
 
-    private static boolean show(Path file, FileKind kind) {
+    /** What a window is opened for, in sight of a person who may have no terminal. */
+    private static boolean inSight(Supplier<Preferences> preferences, BooleanSupplier opening) {
         if (!hasDisplay()) {
             return false;
         }
         TOOLKIT.setLevel(Level.SEVERE);
-        return ArrivalApp.open(file, kind, Path.of(System.getProperty("user.home")), Clock.systemDefaultZone());
+        try {
+            return opening.getAsBoolean();
+        } catch (Refused e) {
+            RefusalWindow.show(preferences.get(), e.defect());
+            throw e;
+        }
+    }
+
+    private static boolean show(Path file) {
+        Path home = Path.of(System.getProperty("user.home"));
+        return inSight(() -> ArrivalModel.preferences(home), () ->
+                ArrivalApp.open(file, FileKind.of(file), home, Clock.systemDefaultZone()));
     }
 
     private static boolean open(Path folder, Optional<Path> samples, boolean load) {
-        if (!hasDisplay()) {
-            return false;
-        }
-        TOOLKIT.setLevel(Level.SEVERE);
+        return inSight(() -> new PreferencesFile(folder).read(), () -> window(folder, samples, load));
+    }
+
+    private static boolean window(Path folder, Optional<Path> samples, boolean load) {
         Clock clock = Clock.systemDefaultZone();
         if (OfficeStore.isOffice(folder)) {
             return OfficeApp.open(OfficeStore.open(folder, OfficeOptions.of(clock)), clock);

@@ -21,10 +21,10 @@ final class FileShowing {
 
     int show(Path file) throws Exception {
         InputFile.requireFile(file);
-        FileKind kind = FileKind.of(file);
-        if (surroundings.showing().show(file, kind)) {
+        if (surroundings.showing().show(file)) {
             return ExitCode.FINE;
         }
+        FileKind kind = FileKind.of(file);
         surroundings.out().println(surroundings.words().text("command.no-display-file"));
         return switch (kind) {
             case PACK -> PackVerifyCommand.verify(surroundings, file);

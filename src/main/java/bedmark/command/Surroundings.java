@@ -1,6 +1,5 @@
 package bedmark.command;
 
-import bedmark.pack.FileKind;
 import bedmark.quantity.UnitSystem;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
@@ -46,11 +45,10 @@ public record Surroundings(PrintWriter out, PrintWriter err, Optional<Path> home
     @FunctionalInterface
     public interface Showing {
         /**
-         * Shows a file.
+         * Shows a file; what it is, and whether it is sound, is found out in sight of the person.
          *
-         * @param kind what it is; whether it is sound is found out in sight of the person
          * @return whether a window could be opened; without a display it could not
          */
-        boolean show(Path file, FileKind kind);
+        boolean show(Path file);
     }
 }

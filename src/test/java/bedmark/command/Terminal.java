@@ -22,7 +22,7 @@ public final class Terminal {
 
     /** Runs a command where there is no display. */
     public static Result run(String... arguments) {
-        return run((file, kind) -> false, arguments);
+        return run(file -> false, arguments);
     }
 
     /** Runs a command where files are shown in a way of the test's. */

@@ -57,7 +57,7 @@ public final class Rehearsal {
                 new Words(Locale.ENGLISH), (folder, samples, load) -> {
                     BedmarkApp.prepare(store, clock);
                     return true;
-                }, (file, kind) -> false));
+                }, file -> false));
     }
 
     private static void delete(Path folder) throws IOException {

@@ -90,12 +90,17 @@ public final class ArrivalModel implements AutoCloseable {
         this.clock = clock;
         this.screen = screen;
         this.folders = folders;
+        this.preferences = new SimpleObjectProperty<>(preferences(home));
         PreferencesFile kept = new PreferencesFile(home, PREFERENCES);
-        this.preferences = new SimpleObjectProperty<>(kept.kept().orElseGet(() ->
-                new PreferencesFile(home.resolve(OfficeStore.USUAL_FOLDER)).read()));
         preferences.addListener((property, before, now) -> kept.write(now));
         this.errand = new Errand(work, screen);
         prove();
+    }
+
+    /** How a person likes such a window: as it was left, else as at the office in their home. */
+    public static Preferences preferences(Path home) {
+        return new PreferencesFile(home, PREFERENCES).kept().orElseGet(() ->
+                new PreferencesFile(home.resolve(OfficeStore.USUAL_FOLDER)).read());
     }
 
     /** Proves the file, once more where it was refused. */

@@ -1,0 +1,57 @@
+package bedmark.screen;
+
+import bedmark.document.Defect;
+import bedmark.screen.start.RefusedView;
+import bedmark.screen.theme.Light;
+import bedmark.screen.theme.Theme;
+import bedmark.wording.Wording;
+import bedmark.words.Words;
+import java.util.concurrent.CountDownLatch;
+import javafx.application.Platform;
+import javafx.scene.Scene;
+import javafx.stage.Stage;
+
+/** The window in place of one that could not be opened. */
+public final class RefusalWindow {
+    private static final double WIDTH = 1280;
+    private static final double HEIGHT = 800;
+
+    private RefusalWindow() {
+    }
+
+    /**
+     * Opens the window and returns when it is closed. Where there is no display it returns at once: who has none reads
+     * the terminal. Not to be called by the screen.
+     *
+     * @param preferences how the person likes the screen
+     */
+    public static void show(Preferences preferences, Defect why) {
+        CountDownLatch closed = new CountDownLatch(1);
+        try {
+            Platform.startup(() -> { });
+        } catch (IllegalStateException e) {
+            // The toolkit runs already: it was made ready while the store was to be opened.
+        } catch (UnsupportedOperationException e) {
+            return;
+        }
+        Platform.runLater(() -> stage(preferences, why).setOnHidden(event -> closed.countDown()));
+        try {
+            closed.await();
+        } catch (InterruptedException e) {
+            Thread.currentThread().interrupt();
+        }
+    }
+
+    private static Stage stage(Preferences preferences, Defect why) {
+        Stage stage = new Stage();
+        RefusedView view = new RefusedView(new Wording(new Words(preferences.locale()), preferences.units()), why,
+                stage::close);
+        Scene scene = new Scene(view, WIDTH, HEIGHT);
+        Theme.apply(scene, preferences.night() ? Light.NIGHT : Light.DAY, Shell.density(preferences));
+        stage.setTitle("Bedmark");
+        stage.setScene(scene);
+        stage.show();
+        view.focus();
+        return stage;
+    }
+}

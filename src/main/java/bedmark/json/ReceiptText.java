@@ -25,15 +25,6 @@ public final class ReceiptText {
      * @throws Refused where it is none, of another version, or holds something impossible
      */
     public static Branch read(byte[] bytes) {
-        Document document = JsonReader.read(bytes);
-        try {
-            FormatCheck.require(document.root(), FORMAT, VERSION);
-            Compiled.SCHEMA.check(document).stream().findFirst().ifPresent(defect -> {
-                throw new Refused(defect);
-            });
-            return document.root();
-        } catch (Refused e) {
-            throw new Refused(document.placed(e.defect()), e);
-        }
+        return FormatCheck.read(bytes, FORMAT, VERSION, () -> Compiled.SCHEMA, receipt -> { });
     }
 }

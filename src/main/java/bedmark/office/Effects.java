@@ -92,7 +92,9 @@ final class Effects implements Books.Effect {
         Optional<PlantRow> known = tables.plant(intake.plant().id());
         boolean newer = known.isEmpty() || !known.get().own() && later(intake.plant(), known.get());
         PlantRow holds = newer ? intake.plant() : known.get();
-        if (newer && known.filter(one -> one.register().equals(holds.register())).isPresent()) {
+        if (newer && known.filter(one -> one.digest().equals(holds.digest())).isPresent()) {
+            tables.madeAgain(holds);
+        } else if (newer && known.filter(one -> one.register().equals(holds.register())).isPresent()) {
             tables.put(holds);
         } else if (newer) {
             put(tables, holds, registers.of(holds));

@@ -99,12 +99,13 @@ record Intake(PlantRow plant, byte[] register, List<CopyRow> copies) {
                     Integer.toString(LONGEST)));
         }
         String conveyor = register.transfer(survey.transfer()).map(Register.Transfer::conveyor).orElse("");
-        boolean underWay = survey.completedAt().isEmpty()
-                && survey.inspectionStatus() == InspectionStatus.INSPECTED;
+        OptionalLong completed = moment(survey.completedAt());
+        InspectionStatus status = survey.inspectionStatus();
+        boolean underWay = completed.isEmpty() && status == InspectionStatus.INSPECTED;
         Copy copy = new Copy(Digest.of(text).hex(), survey.id(), survey.revision(), survey.supersedes(),
                 new ZoneId(plantId(register), survey.transfer()), survey.round().orElse(""),
-                underWay ? InspectionStatus.NOT_INSPECTED : survey.inspectionStatus(), moment(survey.startedAt()),
-                moment(survey.completedAt()), new Origin(createdAt, registerDigest, conveyor));
+                underWay ? InspectionStatus.NOT_INSPECTED : status, moment(survey.startedAt()), completed,
+                new Origin(createdAt, registerDigest, conveyor));
         return new CopyRow(copy, pack, text);
     }
 

@@ -18,6 +18,7 @@ import bedmark.survey.OfficeDeed;
 import bedmark.survey.merge.Clash;
 import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Merge;
+import bedmark.survey.merge.ZoneId;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Duration;
@@ -35,8 +36,11 @@ import java.util.stream.Collectors;
 /** Takes packs in: copied beside the others, proved there, and only then told to the books; receipts of what is in. */
 final class Receiving {
     /** Packs that are brought onto the medium and into the tables together. */
-    private static final int TOGETHER = 8;
-    private static final long TOGETHER_BYTES = 8 << 20;
+    private static final int TOGETHER = 16;
+    private static final long TOGETHER_BYTES = 16 << 20;
+    /** Towards the end fewer go together, so that there is little left to take in when the last one is proved. */
+    private static final int LAST_TOGETHER = 4;
+    private static final int SHARE_OF_REST = 3;
 
     private final OfficeStore store;
     private final PackShelf shelf;
@@ -67,8 +71,8 @@ final class Receiving {
     private static List<Proved> together(Provers provers, int done, int total, Progress progress) {
         List<Proved> packs = new ArrayList<>();
         long bytes = 0;
-        while (packs.size() < TOGETHER && done + packs.size() < total && bytes < TOGETHER_BYTES
-                && !progress.cancelled()) {
+        int most = Math.min(Math.min(TOGETHER, Math.max(LAST_TOGETHER, (total - done) / SHARE_OF_REST)), total - done);
+        while (packs.size() < most && bytes < TOGETHER_BYTES && !progress.cancelled()) {
             progress.at(done + packs.size(), total);
             Proved next = provers.next();
             packs.add(next);
@@ -219,8 +223,12 @@ final class Receiving {
         Set<String> aside = store.minutes(tables).setAside();
         List<List<Clash>> clashes = new ArrayList<>();
         Set<String> later = new HashSet<>();
+        Set<ZoneId> clashing = new HashSet<>(tables.clashing(packs.stream()
+                .flatMap(pack -> pack.pack().intake().zones().stream()).collect(Collectors.toSet())));
         for (int i = fresh.size() - 1; i >= 0; i--) {
-            List<Copy> copies = tables.copies(tables.clashing(packs.get(i).pack().intake().zones())).stream()
+            Set<ZoneId> own = packs.get(i).pack().intake().zones();
+            own.retainAll(clashing);
+            List<Copy> copies = own.isEmpty() ? List.of() : tables.copies(own).stream()
                     .filter(copy -> !later.contains(copy.digest())).toList();
             clashes.add(0, Merge.zones(copies, aside).values().stream().flatMap(zone -> zone.clashes().stream())
                     .toList());

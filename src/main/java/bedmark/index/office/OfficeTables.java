@@ -161,6 +161,11 @@ public final class OfficeTables implements AutoCloseable {
                 plant.made(), plant.own(), plant.digest(), plant.register(), plant.content());
     }
 
+    /** Says when the content was made last that a plant has already. */
+    public void madeAgain(PlantRow plant) {
+        link.run("update plant set made = ? where id = ?", plant.made(), plant.id());
+    }
+
     /** Keeps a version of a register; nothing happens where it is there. */
     public void addRegister(String digest, String plant, byte[] content) {
         if (link.rows("select 1 from register where digest = ?", row -> row.getInt(1), digest).isEmpty()) {

@@ -2,10 +2,13 @@ package bedmark.screen;
 
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import bedmark.document.Defect;
+import bedmark.screen.start.RefusedView;
 import bedmark.screen.start.StartModel;
 import bedmark.screen.start.StartView;
 import bedmark.screen.start.UnlockModel;
 import bedmark.screen.start.UnlockView;
+import bedmark.wording.Wording;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
@@ -16,6 +19,7 @@ import java.time.ZoneOffset;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.function.Function;
 import javafx.application.Platform;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.input.KeyCode;
@@ -76,7 +80,7 @@ class ScreenPicturesTest {
         app.click("foot-back");
         app.until(() -> app.has("load-demo"));
         loading();
-        locked();
+        withoutAStore();
         app.click("load-demo");
         app.until(() -> app.has("person"));
         app.click("person");
@@ -174,17 +178,23 @@ class ScreenPicturesTest {
         app.settle();
     }
 
-    /** A store that takes a passphrase asks for it before there is a shell. */
-    private void locked() throws Exception {
+    /** A store that takes a passphrase asks for it before there is a shell, and one that opens nowhere says why. */
+    private void withoutAStore() throws Exception {
+        UnlockModel locked = new UnlockModel(passphrase -> app.workplace().store(), Platform::runLater);
+        inPlaceOfTheShell("unlock", wording -> new UnlockView(wording, locked, store -> { }));
+        Defect open = Defect.in("/home/survey/.bedmark", "store-locked");
+        inPlaceOfTheShell("refused", wording -> new RefusedView(wording, open, () -> { }));
+    }
+
+    private void inPlaceOfTheShell(String name, Function<Wording, BorderPane> view) throws Exception {
         Glass.on(() -> {
-            UnlockModel model = new UnlockModel(passphrase -> app.workplace().store(), Platform::runLater);
             BorderPane root = (BorderPane) app.shell().scene().getRoot();
             root.setTop(null);
-            root.setCenter(new UnlockView(app.workplace().wording(), model, store -> { }));
+            root.setCenter(view.apply(app.workplace().wording()));
             root.setBottom(null);
             return null;
         });
-        take("unlock");
+        take(name);
         Glass.on(() -> {
             app.shell().toStart();
             return null;

@@ -20,7 +20,6 @@ import java.time.Duration;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
-import javafx.animation.PauseTransition;
 import javafx.application.Application;
 import javafx.application.Platform;
 import javafx.scene.Scene;
@@ -33,8 +32,8 @@ public final class BedmarkApp extends Application {
     /** By then a person has begun to walk, and the start is not held up. */
     private static final Duration PROOF_DELAY = Duration.ofSeconds(20);
 
-    /** By then the first frame is drawn, and nobody can have opened a stop yet. */
-    private static final javafx.util.Duration FORMS_DELAY = javafx.util.Duration.millis(300);
+    /** By then the first screen is in sight, and nobody can have opened a stop yet. */
+    private static final int FRAMES_BEFORE_THE_REST = 4;
 
     /** What the launcher hands over; the toolkit makes the application itself and takes no arguments but texts. */
     private static volatile Optional<Launch> launch = Optional.empty();
@@ -44,6 +43,7 @@ public final class BedmarkApp extends Application {
     private Optional<Workplace> workplace = Optional.empty();
     private Optional<Shell> shell = Optional.empty();
     private Optional<Diary> diary = Optional.empty();
+    private Optional<AfterFrames> rest = Optional.empty();
 
     /**
      * What the window begins with.
@@ -71,7 +71,7 @@ public final class BedmarkApp extends Application {
     /** The options that the app opens a store with. */
     public static StoreOptions options(Clock clock) {
         String name = Optional.ofNullable(System.getenv("HOSTNAME")).filter(host -> !host.isBlank()).orElse("tablet");
-        return StoreOptions.of(name).withClock(clock).withLevels(new LevelWord()::of);
+        return StoreOptions.of(name, clock).withLevels(new LevelWord()::of);
     }
 
     /**
@@ -82,6 +82,7 @@ public final class BedmarkApp extends Application {
      */
     public static void prepare(Path folder, Clock clock) {
         Thread preparing = new Thread(() -> {
+            ToolkitNotes.hush();
             try {
                 Platform.startup(Typeface::load);
             } catch (UnsupportedOperationException e) {
@@ -122,6 +123,7 @@ public final class BedmarkApp extends Application {
 
     private static boolean launch(Launch begin) {
         launch = Optional.of(begin);
+        ToolkitNotes.hush();
         try {
             Application.launch(BedmarkApp.class);
             return true;
@@ -167,9 +169,7 @@ public final class BedmarkApp extends Application {
             opened.failed(failure);
         });
         stage.setScene(opened.scene());
-        PauseTransition drawn = new PauseTransition(FORMS_DELAY);
-        drawn.setOnFinished(event -> here.readForms());
-        drawn.play();
+        rest = Optional.of(AfterFrames.run(FRAMES_BEFORE_THE_REST, here::readWhole));
         if (given.load()) {
             opened.loadDemo();
         }
@@ -177,6 +177,7 @@ public final class BedmarkApp extends Application {
 
     @Override
     public void stop() {
+        rest.ifPresent(AfterFrames::stop);
         shell.ifPresent(Shell::close);
         workplace.ifPresent(Workplace::close);
         diary.ifPresent(noted -> noted.note(Happening.STORE_CLOSED, Map.of()));

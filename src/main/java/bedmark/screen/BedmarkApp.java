@@ -7,6 +7,7 @@ import bedmark.index.StoreOptions;
 import bedmark.screen.round.RoundModel;
 import bedmark.screen.start.UnlockModel;
 import bedmark.screen.start.UnlockView;
+import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
 import bedmark.screen.theme.Theme;
 import bedmark.screen.theme.Typeface;
@@ -17,6 +18,7 @@ import bedmark.words.Words;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Duration;
+import java.time.LocalTime;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
@@ -90,14 +92,23 @@ public final class BedmarkApp extends Application {
                 return;
             }
             Preferences preferences = new PreferencesFile(folder).read();
-            Platform.runLater(() -> {
-                if (launch.isEmpty()) {
-                    ready = Optional.of(FirstScene.ready(preferences, clock, WIDTH, HEIGHT));
-                }
-            });
+            Light light = preferences.lighting().at(LocalTime.now(clock));
+            Density density = Shell.density(preferences);
+            Theme.writeOut(light, density);
+            untilLaunched(() -> ready = Optional.of(FirstScene.dressed(light, density, WIDTH, HEIGHT)));
+            FirstScene.PARTS.forEach(part -> untilLaunched(() -> ready.ifPresent(first -> first.tryOn(part.get()))));
         }, "prepare-toolkit");
         preparing.setDaemon(true);
         preparing.start();
+    }
+
+    /** What is done while the store is being opened must not keep the first screen waiting once it is open. */
+    private static void untilLaunched(Runnable made) {
+        Platform.runLater(() -> {
+            if (launch.isEmpty()) {
+                made.run();
+            }
+        });
     }
 
     /**

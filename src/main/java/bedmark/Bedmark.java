@@ -25,13 +25,10 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.function.BooleanSupplier;
 import java.util.function.Supplier;
-import java.util.logging.Level;
-import java.util.logging.Logger;
 
 /** The program: wires its parts by hand and hands over to a command or to the screen. */
 public final class Bedmark {
-    /** The toolkit warns at each start that it is not in a module; held here, since loggers are kept weakly. */
-    private static final Logger TOOLKIT = Logger.getLogger("javafx");
+    private static final Clock CLOCK = new MachineClock();
 
     private Bedmark() {
     }
@@ -39,7 +36,7 @@ public final class Bedmark {
     public static void main(String... arguments) {
         Optional<Path> home = Optional.ofNullable(System.getProperty("bedmark.home")).map(Path::of);
         Surroundings surroundings = new Surroundings(new PrintWriter(System.out, true, StandardCharsets.UTF_8),
-                new PrintWriter(System.err, true, StandardCharsets.UTF_8), home, Clock.systemDefaultZone(),
+                new PrintWriter(System.err, true, StandardCharsets.UTF_8), home, CLOCK,
                 new Words(Locale.ENGLISH), Bedmark::open, Bedmark::show);
         System.exit(BedmarkCommand.run(surroundings, arguments));
     }
@@ -55,10 +52,10 @@ public final class Bedmark {
         if (!hasDisplay()) {
             return false;
         }
-        TOOLKIT.setLevel(Level.SEVERE);
         try {
             return opening.getAsBoolean();
         } catch (Refused e) {
+            BedmarkApp.awaitToolkit();
             RefusalWindow.show(preferences.get(), e.defect());
             throw e;
         }
@@ -67,7 +64,7 @@ public final class Bedmark {
     private static boolean show(Path file) {
         Path home = Path.of(System.getProperty("user.home"));
         return inSight(() -> ArrivalModel.preferences(home), () ->
-                ArrivalApp.open(file, FileKind.of(file), home, Clock.systemDefaultZone()));
+                ArrivalApp.open(file, FileKind.of(file), home, CLOCK));
     }
 
     private static boolean open(Path folder, Optional<Path> samples, boolean load) {
@@ -75,18 +72,17 @@ public final class Bedmark {
     }
 
     private static boolean window(Path folder, Optional<Path> samples, boolean load) {
-        Clock clock = Clock.systemDefaultZone();
         if (OfficeStore.isOffice(folder)) {
-            return OfficeApp.open(OfficeStore.open(folder, OfficeOptions.of(clock)), clock);
+            return OfficeApp.open(OfficeStore.open(folder, OfficeOptions.of(CLOCK)), CLOCK);
         }
-        BedmarkApp.prepare(folder, clock);
-        StoreOptions options = BedmarkApp.options(clock);
+        BedmarkApp.prepare(folder, CLOCK);
+        StoreOptions options = BedmarkApp.options(CLOCK);
         if (new StoreFolder(folder, options).sealed()) {
             return BedmarkApp.unlock(folder, passphrase -> Store.open(folder,
-                    options.withPassphrase(Optional.of(passphrase))), clock, samples);
+                    options.withPassphrase(Optional.of(passphrase))), CLOCK, samples);
         }
         try (Store store = Store.open(folder, options)) {
-            return BedmarkApp.open(store, clock, samples, load);
+            return BedmarkApp.open(store, CLOCK, samples, load);
         }
     }
 }

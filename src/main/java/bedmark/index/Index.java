@@ -20,7 +20,7 @@ import java.util.UUID;
 
 /** Takes entries into the database, one by one or many at once, in the order of the journal. */
 final class Index implements AutoCloseable {
-    static final String FORMAT = "4";
+    static final String FORMAT = "5";
     static final String UNREAD = "?";
     private static final int BATCH = 1000;
     private static final String ENTRY = "insert into entry values (?, ?, ?, ?, ?, ?, ?, ?, ?)";
@@ -93,7 +93,9 @@ final class Index implements AutoCloseable {
     }
 
     private static byte[] seal(Mark mark, Tally tally) {
-        return RowSeal.of(mark.journal(), mark.sequence(), mark.place(), tally);
+        Place place = mark.place();
+        return RowSeal.of(mark.journal(), mark.sequence(), place.segment(), place.offset(), place.length(),
+                place.hash(), tally.entries(), tally.text());
     }
 
     private static String setting(Database database, String name) {

@@ -118,8 +118,9 @@ final class Queries {
     private Walk walk(Steps steps) {
         Entry started = index.entry(steps.started());
         Optional<Entry> finished = steps.finished().map(index::entry);
-        boolean told = started.act().equals(new Act.WalkStarted(steps.round()))
-                && finished.filter(entry -> !entry.act().equals(new Act.WalkFinished(steps.round()))).isEmpty();
+        boolean told = started.act() instanceof Act.WalkStarted start && start.round().equals(steps.round())
+                && finished.filter(entry -> !(entry.act() instanceof Act.WalkFinished end
+                        && end.round().equals(steps.round()))).isEmpty();
         if (!told) {
             throw new IndexBroken("the walk of round " + steps.round() + " is not what the journal tells");
         }

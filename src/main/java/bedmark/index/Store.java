@@ -397,6 +397,11 @@ public final class Store implements AutoCloseable {
         return ask(queries -> queries.surveys(query));
     }
 
+    /** As {@link #surveys(SurveyQuery)}, each query in turn: what many of them ask is asked at once. */
+    public List<List<SurveyLine>> surveys(List<SurveyQuery> several) {
+        return ask(queries -> several.stream().map(queries::surveys).toList());
+    }
+
     public Optional<SurveyLine> survey(UUID id) {
         return ask(queries -> queries.row(id).map(SurveyRow::line));
     }

@@ -36,7 +36,12 @@ public record StoreOptions(Clock clock, FileLayer files, Progress progress, Stri
 
     /** The tablet's own clock and disk, no progress, no levels. */
     public static StoreOptions of(String deviceName) {
-        return new StoreOptions(Clock.systemDefaultZone(), FileLayer.disk(), Progress.NONE, deviceName, LevelOf.NONE,
+        return of(deviceName, Clock.systemDefaultZone());
+    }
+
+    /** The same with another clock. */
+    public static StoreOptions of(String deviceName, Clock clock) {
+        return new StoreOptions(clock, FileLayer.disk(), Progress.NONE, deviceName, LevelOf.NONE,
                 Optional.empty(), SEGMENT_BYTES);
     }
 

@@ -54,8 +54,10 @@ final class JournalWalk {
             hash = mark.place().hash();
         });
         List<SegmentFile> ours = SegmentFile.ours(segments);
-        segments.stream().filter(segment -> !ours.contains(segment))
-                .forEach(segment -> flaw(segment, "journal-segment-foreign", "0"));
+        if (ours.size() < segments.size()) {
+            segments.stream().filter(segment -> !ours.contains(segment))
+                    .forEach(segment -> flaw(segment, "journal-segment-foreign", "0"));
+        }
         int begin = 0;
         while (from.isPresent() && ours.get(begin).number() != from.get().place().segment()) {
             begin++;

@@ -5,7 +5,6 @@ import java.nio.ByteBuffer;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -18,10 +17,11 @@ import java.util.regex.Pattern;
  * @param first  the first sequence that may stand here; nothing where neither the header nor an entry tells it
  */
 record SegmentFile(Path path, int number, long size, Optional<SegmentHeader> header, Optional<Long> first) {
-    private static final Pattern NAME = Pattern.compile("(\\d{8})\\.journal");
+    private static final int DIGITS = 8;
+    private static final Pattern NAME = Pattern.compile("(\\d{" + DIGITS + "})\\.journal");
 
     static Path path(Path folder, int number) {
-        return folder.resolve(String.format(Locale.ROOT, "%08d.journal", number));
+        return folder.resolve("0".repeat(Math.max(0, DIGITS - Integer.toString(number).length())) + number + ".journal");
     }
 
     String name() {

@@ -7,6 +7,7 @@ import bedmark.index.StoreOptions;
 import bedmark.screen.round.RoundModel;
 import bedmark.screen.start.UnlockModel;
 import bedmark.screen.start.UnlockView;
+import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
 import bedmark.screen.theme.Theme;
 import bedmark.screen.theme.Typeface;
@@ -17,10 +18,10 @@ import bedmark.words.Words;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Duration;
+import java.time.LocalTime;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
-import javafx.animation.PauseTransition;
 import javafx.application.Application;
 import javafx.application.Platform;
 import javafx.scene.Scene;
@@ -33,17 +34,20 @@ public final class BedmarkApp extends Application {
     /** By then a person has begun to walk, and the start is not held up. */
     private static final Duration PROOF_DELAY = Duration.ofSeconds(20);
 
-    /** By then the first frame is drawn, and nobody can have opened a stop yet. */
-    private static final javafx.util.Duration FORMS_DELAY = javafx.util.Duration.millis(300);
+    /** By then the first screen is in sight, and nobody can have opened a stop yet. */
+    private static final int FRAMES_BEFORE_THE_REST = 4;
 
     /** What the launcher hands over; the toolkit makes the application itself and takes no arguments but texts. */
     private static volatile Optional<Launch> launch = Optional.empty();
+    /** Starts the toolkit; ended once that runs. */
+    private static Optional<Thread> preparing = Optional.empty();
     /** Made by the screen while the store was being opened. */
     private static Optional<FirstScene> ready = Optional.empty();
 
     private Optional<Workplace> workplace = Optional.empty();
     private Optional<Shell> shell = Optional.empty();
     private Optional<Diary> diary = Optional.empty();
+    private Optional<AfterFrames> rest = Optional.empty();
 
     /**
      * What the window begins with.
@@ -71,7 +75,7 @@ public final class BedmarkApp extends Application {
     /** The options that the app opens a store with. */
     public static StoreOptions options(Clock clock) {
         String name = Optional.ofNullable(System.getenv("HOSTNAME")).filter(host -> !host.isBlank()).orElse("tablet");
-        return StoreOptions.of(name).withClock(clock).withLevels(new LevelWord()::of);
+        return StoreOptions.of(name, clock).withLevels(new LevelWord()::of);
     }
 
     /**
@@ -81,7 +85,8 @@ public final class BedmarkApp extends Application {
      * @param folder the store's; how the person likes the tablet lies there
      */
     public static void prepare(Path folder, Clock clock) {
-        Thread preparing = new Thread(() -> {
+        Thread thread = new Thread(() -> {
+            ToolkitNotes.hush();
             try {
                 Platform.startup(Typeface::load);
             } catch (UnsupportedOperationException e) {
@@ -89,14 +94,35 @@ public final class BedmarkApp extends Application {
                 return;
             }
             Preferences preferences = new PreferencesFile(folder).read();
-            Platform.runLater(() -> {
-                if (launch.isEmpty()) {
-                    ready = Optional.of(FirstScene.ready(preferences, clock, WIDTH, HEIGHT));
-                }
-            });
+            Light light = preferences.lighting().at(LocalTime.now(clock));
+            Density density = Shell.density(preferences);
+            Theme.writeOut(light, density);
+            untilLaunched(() -> ready = Optional.of(FirstScene.dressed(light, density, WIDTH, HEIGHT)));
+            FirstScene.PARTS.forEach(part -> untilLaunched(() -> ready.ifPresent(first -> first.tryOn(part.get()))));
         }, "prepare-toolkit");
-        preparing.setDaemon(true);
-        preparing.start();
+        thread.setDaemon(true);
+        preparing = Optional.of(thread);
+        thread.start();
+    }
+
+    /** Waits for the toolkit that {@link #prepare} starts, for who needs it though no store could be opened. */
+    public static void awaitToolkit() {
+        try {
+            if (preparing.isPresent()) {
+                preparing.get().join();
+            }
+        } catch (InterruptedException e) {
+            Thread.currentThread().interrupt();
+        }
+    }
+
+    /** What is done while the store is being opened must not keep the first screen waiting once it is open. */
+    private static void untilLaunched(Runnable made) {
+        Platform.runLater(() -> {
+            if (launch.isEmpty()) {
+                made.run();
+            }
+        });
     }
 
     /**
@@ -122,6 +148,7 @@ public final class BedmarkApp extends Application {
 
     private static boolean launch(Launch begin) {
         launch = Optional.of(begin);
+        ToolkitNotes.hush();
         try {
             Application.launch(BedmarkApp.class);
             return true;
@@ -167,9 +194,7 @@ public final class BedmarkApp extends Application {
             opened.failed(failure);
         });
         stage.setScene(opened.scene());
-        PauseTransition drawn = new PauseTransition(FORMS_DELAY);
-        drawn.setOnFinished(event -> here.readForms());
-        drawn.play();
+        rest = Optional.of(AfterFrames.run(FRAMES_BEFORE_THE_REST, here::readWhole));
         if (given.load()) {
             opened.loadDemo();
         }
@@ -177,6 +202,7 @@ public final class BedmarkApp extends Application {
 
     @Override
     public void stop() {
+        rest.ifPresent(AfterFrames::stop);
         shell.ifPresent(Shell::close);
         workplace.ifPresent(Workplace::close);
         diary.ifPresent(noted -> noted.note(Happening.STORE_CLOSED, Map.of()));

@@ -7,16 +7,17 @@ import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.SectionHeader;
 import bedmark.screen.part.TopBar;
 import bedmark.screen.part.Weight;
+import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Icon;
 import bedmark.screen.theme.LevelGlyph;
 import bedmark.screen.theme.LevelShape;
 import bedmark.screen.theme.Light;
 import bedmark.screen.theme.Theme;
-import java.time.Clock;
-import java.time.LocalTime;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.function.Supplier;
+import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
@@ -33,6 +34,9 @@ import org.controlsfx.control.textfield.CustomTextField;
  * @param root holds head, body and foot
  */
 record FirstScene(Scene scene, BorderPane root) {
+    /** What a first screen is made of, those first that take longest to be made the first time. */
+    static final List<Supplier<Node>> PARTS = List.of(FirstScene::list, FirstScene::side, FirstScene::head,
+            FirstScene::foot);
 
     /** A scene that nobody has dressed yet. */
     static FirstScene plain(double width, double height) {
@@ -40,31 +44,48 @@ record FirstScene(Scene scene, BorderPane root) {
         return new FirstScene(new Scene(root, width, height), root);
     }
 
-    /**
-     * A scene in the person's colours that has shown, unseen, the parts that a first screen is made of: what is read
-     * and made for them the first time is there when the store is open. Called by the screen.
-     */
-    static FirstScene ready(Preferences preferences, Clock clock, double width, double height) {
+    /** The same in the person's colours, with its style sheets read. Called by the screen. */
+    static FirstScene dressed(Light light, Density density, double width, double height) {
         FirstScene made = plain(width, height);
-        Light light = preferences.lighting().at(LocalTime.now(clock));
-        Theme.apply(made.scene, light, Shell.density(preferences));
-        made.root.setTop(new TopBar(button()));
+        Theme.apply(made.scene, light, density);
+        made.root.applyCss();
+        return made;
+    }
+
+    /**
+     * Shows a part unseen: what is read and made for it the first time is there when the store is open. Called by the
+     * screen.
+     */
+    void tryOn(Node part) {
+        root.setCenter(part);
+        root.applyCss();
+        root.layout();
+        root.getChildren().clear();
+    }
+
+    private static Node head() {
+        return new TopBar(button());
+    }
+
+    private static Node list() {
         ScrollPane scroll = new ScrollPane(stops());
         scroll.setFitToWidth(true);
         scroll.getStyleClass().add("form-scroll");
-        VBox listed = new VBox(new HBox(new CustomTextField(), new ToggleButton(" ")), scroll);
-        listed.getStyleClass().add("stops");
-        made.root.setCenter(listed);
+        VBox list = new VBox(new HBox(new CustomTextField(), new ToggleButton(" ")), scroll);
+        list.getStyleClass().add("stops");
+        return list;
+    }
+
+    private static Node side() {
         VBox side = new VBox(new SectionHeader(" "), new CautionStrip(" "));
         side.getStyleClass().add("summary");
-        made.root.setRight(side);
+        return side;
+    }
+
+    private static Node foot() {
         RoundTicks ticks = new RoundTicks();
         ticks.show(List.of(RoundTicks.Tick.TO_DO), OptionalInt.empty());
-        made.root.setBottom(new FootBar(Optional.of(button()), Optional.of(ticks), Optional.of(button())));
-        made.root.applyCss();
-        made.root.layout();
-        made.root.getChildren().clear();
-        return made;
+        return new FootBar(Optional.of(button()), Optional.of(ticks), Optional.of(button()));
     }
 
     private static VBox stops() {

@@ -25,18 +25,22 @@ public final class Heads {
         bar.titleProperty().set(title);
         bar.subtitleProperty().set(subtitle);
         listening.to(SavedMark.of(workplace), bar.asideProperty()::set);
-        Label words = new Label();
+        VBox head = new VBox(bar);
+        listening.to(workplace.scribe().troubleProperty(), defect -> {
+            head.getChildren().removeIf(node -> node != bar);
+            SavedMark.trouble(workplace).ifPresent(words -> head.getChildren().add(trouble(workplace, words)));
+        });
+        return head;
+    }
+
+    private static HBox trouble(Workplace workplace, String sentence) {
+        Label words = new Label(sentence);
         words.setWrapText(true);
         words.setMaxWidth(Double.MAX_VALUE);
         HBox.setHgrow(words, Priority.ALWAYS);
         HBox trouble = new HBox(words, new ActionButton(Weight.PLAIN, workplace.wording().text("screen.try-again"),
                 workplace.scribe()::retry));
         trouble.getStyleClass().add("trouble");
-        trouble.managedProperty().bind(trouble.visibleProperty());
-        listening.to(workplace.scribe().troubleProperty(), defect -> {
-            trouble.setVisible(defect.isPresent());
-            words.setText(SavedMark.trouble(workplace).orElse(""));
-        });
-        return new VBox(bar, trouble);
+        return trouble;
     }
 }

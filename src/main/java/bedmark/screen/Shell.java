@@ -50,6 +50,7 @@ public final class Shell implements Navigator {
     private double scale = 1;
     private Optional<RoundModel> walked = Optional.empty();
     private boolean failing;
+    private boolean closed;
 
     /** A window of that size; the round that is being walked is shown first, else the start of a walk. */
     public Shell(Workplace workplace, double width, double height) {
@@ -211,9 +212,13 @@ public final class Shell implements Navigator {
 
     /**
      * Something failed on the screen: what was typed is saved, and the person is told and led back to the round, or to
-     * the start where the way to the round fails too.
+     * the start where the way to the round fails too. What fails once the window is closed leads nowhere: the start
+     * would end the walk that the next program goes on with.
      */
     public void failed(Throwable failure) {
+        if (closed) {
+            return;
+        }
         boolean again = failing;
         failing = true;
         letGo();
@@ -239,6 +244,7 @@ public final class Shell implements Navigator {
 
     /** Saves what is typed and lets go of the screen. */
     public void close() {
+        closed = true;
         clock.stop();
         screen.left();
     }

@@ -79,7 +79,7 @@ public final class Workplace implements AutoCloseable {
     /** Reads the plant anew, where it may have changed. Runs beside the screen. */
     public void reread() {
         Optional<Site> read = store.register().map(Site::of);
-        read.ifPresent(Site::readForms);
+        read.ifPresent(Site::readWhole);
         screen.execute(() -> site.set(read));
     }
 
@@ -146,11 +146,11 @@ public final class Workplace implements AutoCloseable {
         scribe.report(Defect.in("", FAILED, failure.getClass().getSimpleName()));
     }
 
-    /** Reads the forms beside the screen, before a stop is opened, and says in the head where one can't be read. */
-    void readForms() {
+    /** Reads beside the screen what a stop is surveyed with, and says in the head where it can't be read. */
+    void readWhole() {
         site.get().ifPresent(plant -> longWork.execute(() -> {
             try {
-                plant.readForms();
+                plant.readWhole();
             } catch (Refused e) {
                 screen.execute(() -> scribe.report(e.defect()));
             }

@@ -4,6 +4,7 @@ import bedmark.document.Branch;
 import bedmark.document.Refused;
 import bedmark.engine.verdict.Level;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Judges one survey in a word, for lists: the level of its verdict by the register that it was made with. The survey is
@@ -13,7 +14,7 @@ import java.util.List;
  */
 public final class LevelWord {
     private Branch known = Branch.EMPTY;
-    private Assessor assessor = new Assessor(Register.empty());
+    private Optional<Assessor> assessor = Optional.empty();
 
     /**
      * The level's word.
@@ -25,11 +26,11 @@ public final class LevelWord {
     public synchronized String of(Branch survey, Branch register) {
         try {
             Branch plant = register.branch("plant").orElse(Branch.EMPTY);
-            if (plant != known) {
-                assessor = new Assessor(new Register(plant));
+            if (assessor.isEmpty() || plant != known) {
+                assessor = Optional.of(new Assessor(new Register(plant)));
                 known = plant;
             }
-            return assessor.assess(new Survey(survey), List.of()).level().code();
+            return assessor.get().assess(new Survey(survey), List.of()).level().code();
         } catch (Refused e) {
             return Level.INCOMPLETE.code();
         }

@@ -69,6 +69,7 @@ create table survey (
   completed varchar(40),
   finished bigint not null,
   verdict varchar not null,
+  left_open int not null,
   first_no bigint not null,
   last_no bigint not null,
   hash binary(32) not null,

@@ -74,6 +74,18 @@ class WalkResumedTest {
     }
 
     @Test
+    void whatFailsOnceTheWindowIsClosedDoesNotEndIt() throws Exception {
+        Shell closed = app.shell();
+        app.close();
+        Glass.on(() -> {
+            closed.failed(new IllegalStateException("too late"));
+            return null;
+        });
+        open(Duration.ofHours(1));
+        assertTrue(app.has("search"));
+    }
+
+    @Test
     void theNextDayBeginsWithTheSafetyCard() throws Exception {
         restart(Duration.ofHours(24));
         assertTrue(app.has("start-walk"));

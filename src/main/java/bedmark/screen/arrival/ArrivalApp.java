@@ -2,6 +2,7 @@ package bedmark.screen.arrival;
 
 import bedmark.pack.FileKind;
 import bedmark.screen.StageChoice;
+import bedmark.screen.ToolkitNotes;
 import bedmark.screen.office.OfficeApp;
 import bedmark.screen.office.OfficeShell;
 import java.nio.file.Path;
@@ -34,6 +35,7 @@ public final class ArrivalApp extends Application {
      */
     public static boolean open(Path file, FileKind kind, Path home, Clock clock) {
         launch = Optional.of(new Launch(file, kind, home, clock));
+        ToolkitNotes.hush();
         try {
             Application.launch(ArrivalApp.class);
             return true;

@@ -2,6 +2,7 @@ package bedmark.screen.office;
 
 import bedmark.office.OfficeStore;
 import bedmark.screen.StageChoice;
+import bedmark.screen.ToolkitNotes;
 import java.time.Clock;
 import java.util.Optional;
 import javafx.application.Application;
@@ -28,6 +29,7 @@ public final class OfficeApp extends Application {
      */
     public static boolean open(OfficeStore store, Clock clock) {
         launch = Optional.of(new Launch(store, clock));
+        ToolkitNotes.hush();
         try {
             Application.launch(OfficeApp.class);
             return true;

@@ -37,8 +37,6 @@ import javafx.beans.property.StringProperty;
 public final class RoundModel {
     private final Workplace workplace;
     private final Round round;
-    /** How many actions a finished survey left open, which never changes. */
-    private final Map<UUID, Integer> leftOpen = new HashMap<>();
     private final StringProperty search = new SimpleStringProperty("");
     private final BooleanProperty waitingOnly = new SimpleBooleanProperty();
     private final ReadOnlyObjectWrapper<List<RoundRow>> rows = new ReadOnlyObjectWrapper<>(List.of());
@@ -79,20 +77,23 @@ public final class RoundModel {
         store.surveys(SurveyQuery.ALL.ofRound(round.id()).current()).forEach(line ->
                 lines.put(line.transfer(), line));
         Map<String, String> areas = site.register().areaNames();
+        List<Round.Point> points = round.points().stream()
+                .filter(point -> site.register().transfer(point.transfer()).isPresent()).toList();
+        List<List<SurveyLine>> last = store.surveys(points.stream().map(point -> last(point.transfer())).toList());
         List<RoundRow> read = new ArrayList<>();
-        for (Round.Point point : round.points()) {
-            site.register().transfer(point.transfer()).ifPresent(transfer -> read.add(row(transfer,
-                    site.register(), areas, Optional.ofNullable(lines.get(transfer.id())),
-                    point.dueBy().or(round::dueBy))));
+        for (int i = 0; i < points.size(); i++) {
+            Round.Point point = points.get(i);
+            read.add(row(site.register().transfer(point.transfer()).orElseThrow(), site.register(), areas,
+                    Optional.ofNullable(lines.get(point.transfer())), last.get(i).stream().findFirst(),
+                    point.dueBy().or(round::dueBy)));
         }
         rows.set(List.copyOf(read));
         filter();
     }
 
     private RoundRow row(Register.Transfer transfer, Register register, Map<String, String> areas,
-                         Optional<SurveyLine> line, Optional<LocalDate> dueBy) {
+                         Optional<SurveyLine> line, Optional<SurveyLine> last, Optional<LocalDate> dueBy) {
         String conveyor = register.conveyorOf(transfer).tag();
-        Optional<SurveyLine> last = lastLine(transfer);
         return new RoundRow(transfer.id(), transfer.tag(),
                 transfer.from().map(from -> from + " \u2192 " + conveyor).orElse(conveyor),
                 transfer.area().map(area -> areas.getOrDefault(area, area)).orElse(""), line,
@@ -102,22 +103,14 @@ public final class RoundModel {
 
     /** What the office noted there and knows to be open, and what the last survey left open. */
     private int notes(Register.Transfer transfer, Optional<SurveyLine> last) {
-        int left = last.map(line -> leftOpen.computeIfAbsent(line.id(), this::leftOpen)).orElse(0);
-        return transfer.document().series("officeNotes").size() + left
+        return transfer.document().series("officeNotes").size() + last.map(SurveyLine::leftOpen).orElse(0)
                 + PlannedAction.of(transfer.document(), "openActions").size();
     }
 
-    private int leftOpen(UUID survey) {
-        return (int) workplace.store().history(survey).stream()
-                .flatMap(history -> PlannedAction.of(history.survey().document(), PlannedAction.KEY).stream())
-                .filter(action -> !action.done()).count();
-    }
-
-    /** What other rounds found at a transfer point last. */
-    private Optional<SurveyLine> lastLine(Register.Transfer transfer) {
-        return workplace.store().surveys(SurveyQuery.ALL.ofTransfer(transfer.id()).besideRound(round.id()).current()
-                .inspected().in(QueueState.COMPLETED, QueueState.QUEUED, QueueState.EXPORTED, QueueState.RECEIVED)
-                .newest(1)).stream().findFirst();
+    /** Asks what other rounds found at a transfer point last. */
+    private SurveyQuery last(String transfer) {
+        return SurveyQuery.ALL.ofTransfer(transfer).besideRound(round.id()).current().inspected()
+                .in(QueueState.COMPLETED, QueueState.QUEUED, QueueState.EXPORTED, QueueState.RECEIVED).newest(1);
     }
 
     private void filter() {
@@ -216,7 +209,8 @@ public final class RoundModel {
         return beside(transfer, 0);
     }
 
-    private int index(String transfer) {
+    /** Where a stop stands in walking order; -1 for none. */
+    int index(String transfer) {
         for (int i = 0; i < rows.get().size(); i++) {
             if (rows.get().get(i).transfer().equals(transfer)) {
                 return i;

@@ -1,6 +1,7 @@
 package bedmark.screen.round;
 
 import bedmark.document.Branch;
+import bedmark.screen.AfterFrames;
 import bedmark.screen.Heads;
 import bedmark.screen.Navigator;
 import bedmark.screen.SidedScreen;
@@ -47,9 +48,9 @@ import org.controlsfx.control.textfield.CustomTextField;
 
 /** The round: its stops in walking order, grouped by area; beside them what was found so far. */
 public final class RoundView extends SidedScreen {
-    /** How many stops before and behind the next one are built before the screen is first drawn. */
+    /** How many stops are built before the screen is first drawn, about as many as it holds; one before the next. */
+    private static final int IN_SIGHT = 8;
     private static final int BEFORE = 1;
-    private static final int AHEAD = 9;
     private static final int AT_A_TIME = 4;
 
     /** Which stops are built before the screen is first drawn. */
@@ -70,6 +71,7 @@ public final class RoundView extends SidedScreen {
     /** The stops that are in the list. */
     private int from;
     private int to;
+    private boolean gone;
     private final CustomTextField search = new CustomTextField();
 
     public RoundView(Workplace workplace, RoundModel model, Navigator navigator, First first) {
@@ -97,7 +99,6 @@ public final class RoundView extends SidedScreen {
         layOut(first);
         listening.onChange(model.shownProperty(), rows -> layOut(First.ALL));
         listening.onChange(model.rowsProperty(), rows -> summarise());
-        summarise();
     }
 
     /** The search, and beside it which stops are shown at all. */
@@ -138,9 +139,9 @@ public final class RoundView extends SidedScreen {
     private void layOut(First built) {
         List<RoundRow> rows = model.shownProperty().get();
         boolean some = built == First.IN_SIGHT;
-        int next = some ? Math.max(0, model.nextToDo("").map(rows::indexOf).orElse(0)) : 0;
-        from = some ? Math.max(0, next - BEFORE) : 0;
-        to = some ? Math.min(rows.size(), next + AHEAD) : rows.size();
+        int next = some ? model.nextToDo("").map(row -> model.index(row.transfer())).orElse(0) : 0;
+        from = some ? Math.max(0, Math.min(next - BEFORE, rows.size() - IN_SIGHT)) : 0;
+        to = some ? Math.min(rows.size(), from + IN_SIGHT) : rows.size();
         list.getChildren().setAll(lines(rows, from, to));
         whole();
     }
@@ -160,7 +161,7 @@ public final class RoundView extends SidedScreen {
     /** Takes more stops into the list, behind and then before it; a few at a time, so that presses get their turn. */
     private void fillSome() {
         List<RoundRow> rows = model.shownProperty().get();
-        if (list.getScene() == null || from == 0 && to == rows.size()) {
+        if (gone || from == 0 && to == rows.size()) {
             return;
         }
         if (to < rows.size()) {
@@ -440,8 +441,11 @@ public final class RoundView extends SidedScreen {
 
     @Override
     public void turned(boolean upright) {
+        boolean asIs = portrait == upright && !side.getChildren().isEmpty();
         portrait = upright;
-        summarise();
+        if (!asIs) {
+            summarise();
+        }
         super.turned(upright);
     }
 
@@ -449,11 +453,12 @@ public final class RoundView extends SidedScreen {
     public void shown() {
         revealNext();
         body.requestFocus();
-        Platform.runLater(this::fillSome);
+        listening.onEnd(AfterFrames.run(1, this::fillSome)::stop);
     }
 
     @Override
     public void left() {
+        gone = true;
         search.textProperty().unbindBidirectional(model.searchProperty());
         super.left();
     }

@@ -2,6 +2,7 @@ package bedmark.screen.theme;
 
 import bedmark.picture.LevelFigure;
 import java.util.List;
+import java.util.stream.Stream;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.scene.layout.Region;
@@ -13,16 +14,13 @@ public final class LevelGlyph extends Region {
     private final ObjectProperty<LevelShape> level;
     private final SVGPath bed = path("bed");
     private final SVGPath limit = path("limit");
-    private final SVGPath trough = path("trough");
-    private final SVGPath boards = path("boards");
+    private final SVGPath walls = path("walls");
     private final SVGPath dashes = path("dashes");
 
     public LevelGlyph(LevelShape first) {
         level = new SimpleObjectProperty<>(this, "level", first);
         setMouseTransparent(true);
-        trough.setContent(LevelFigure.TROUGH);
-        boards.setContent(LevelFigure.BOARDS);
-        getChildren().addAll(bed, limit, trough, boards, dashes);
+        walls.setContent(LevelFigure.TROUGH + " " + LevelFigure.BOARDS);
         level.subscribe(this::draw);
     }
 
@@ -35,6 +33,9 @@ public final class LevelGlyph extends Region {
         bed.setContent(shape.figure().bed());
         limit.setContent(shape.figure().limit());
         dashes.setContent(shape.figure().dashes());
+        // A list holds many glyphs: a path that draws nothing would be dressed and placed all the same.
+        getChildren().setAll(Stream.of(bed, limit, walls, dashes).filter(path -> !path.getContent().isEmpty())
+                .toList());
     }
 
     private static SVGPath path(String styleClass) {
@@ -47,8 +48,10 @@ public final class LevelGlyph extends Region {
     @Override
     protected void layoutChildren() {
         double scale = Math.min(getWidth() / LevelFigure.WIDTH, getHeight() / LevelFigure.HEIGHT);
-        for (SVGPath path : List.of(bed, limit, trough, boards, dashes)) {
-            Grid.place(path, scale, (getWidth() - LevelFigure.WIDTH * scale) / 2, (getHeight() - LevelFigure.HEIGHT * scale) / 2);
+        double left = (getWidth() - LevelFigure.WIDTH * scale) / 2;
+        double top = (getHeight() - LevelFigure.HEIGHT * scale) / 2;
+        for (SVGPath path : List.of(bed, limit, walls, dashes)) {
+            Grid.place(path, scale, left, top);
         }
     }
 }

@@ -8,6 +8,7 @@ import java.util.Base64;
 import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
+import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.scene.Scene;
 
@@ -18,7 +19,23 @@ public final class Theme {
             "arrival.css", "office.css");
     private static final List<String> OF_TABLET = SHEETS.subList(0, SHEETS.indexOf("arrival.css"));
 
+    /** Written out last: a scene is dressed anew with every screen of another language or size, mostly in the same. */
+    private static volatile Optional<Written> last = Optional.empty();
+
     private Theme() {
+    }
+
+    /** Style sheets as their addresses, and what they were written out for. */
+    private record Written(List<String> names, Light light, Density density, List<String> sheets) {
+
+        boolean isFor(List<String> others, Light wanted, Density size) {
+            return names == others && light == wanted && density.equals(size);
+        }
+    }
+
+    /** Writes the sheets of a tablet out, so that a scene is dressed quickly; needs no toolkit and no thread of its. */
+    public static void writeOut(Light light, Density density) {
+        sheets(light, density, OF_TABLET);
     }
 
     /**
@@ -36,11 +53,19 @@ public final class Theme {
 
     private static void apply(Scene scene, Light light, Density density, List<String> names) {
         Typeface.load();
-        List<String> sheets = Stream.concat(Stream.of(tokens(light)), names.stream()
-                .map(name -> density.transcribe(read(name)))).map(Theme::asAddress).toList();
+        List<String> sheets = sheets(light, density, names);
         if (!scene.getStylesheets().equals(sheets)) {
             scene.getStylesheets().setAll(sheets);
         }
+    }
+
+    private static List<String> sheets(Light light, Density density, List<String> names) {
+        return last.filter(known -> known.isFor(names, light, density)).map(Written::sheets).orElseGet(() -> {
+            List<String> written = Stream.concat(Stream.of(tokens(light)), names.stream()
+                    .map(name -> density.transcribe(read(name)))).map(Theme::asAddress).toList();
+            last = Optional.of(new Written(names, light, density, written));
+            return written;
+        });
     }
 
     /** The tokens of a light, as the style of the root. */

@@ -8,8 +8,9 @@ import bedmark.index.Device;
 import bedmark.index.DeviceFile;
 import bedmark.index.office.OfficeBroken;
 import bedmark.index.office.OfficeTables;
+import bedmark.index.office.PackedZone;
 import bedmark.index.office.Verdict;
-import bedmark.index.office.ZoneRow;
+import bedmark.index.office.ZoneNames;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
 import bedmark.journal.Progress;
@@ -68,7 +69,7 @@ public final class OfficeStore implements AutoCloseable {
     private final Results results;
     private final PackPhotos photos;
     private Minutes minutes = new Minutes();
-    private SoftReference<List<ZoneRow>> rows = new SoftReference<>(null);
+    private SoftReference<List<PackedZone>> rows = new SoftReference<>(null);
     private final AtomicBoolean closed = new AtomicBoolean();
 
     private OfficeStore(Path folder, Optional<String> url, OfficeOptions options, Desk desk, Closeable lock,
@@ -275,7 +276,8 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     /**
-     * The zones that a query asks for, worst first.
+     * The zones that a query asks for, worst first. The list tells what was true when it was asked for, and puts a zone
+     * together whenever that is looked at: whoever looks at all of them several times copies it first.
      *
      * @param progress told while zones are judged that were not judged since they changed
      */
@@ -305,8 +307,8 @@ public final class OfficeStore implements AutoCloseable {
     }
 
     /** Every zone's row; kept until something changes, where nobody else can change it. */
-    private List<ZoneRow> zones(OfficeTables tables) {
-        List<ZoneRow> kept = rows.get();
+    private List<PackedZone> zones(OfficeTables tables) {
+        List<PackedZone> kept = rows.get();
         if (kept == null || books instanceof ServerBooks) {
             kept = tables.zones();
             rows = new SoftReference<>(kept);
@@ -417,12 +419,12 @@ public final class OfficeStore implements AutoCloseable {
 
     /** The zone with that id, or with that tag where there is one alone. */
     public Optional<ZoneId> zone(String named) {
-        List<ZoneRow> rows = ask(OfficeTables::zones);
-        List<ZoneId> exact = rows.stream().filter(row -> row.names().zone().key().equals(named)
-                || row.names().zone().transfer().equals(named)).map(row -> row.names().zone()).toList();
-        List<ZoneId> found = exact.isEmpty() ? rows.stream().filter(row -> row.names().tag().equals(named))
-                .map(row -> row.names().zone()).toList() : exact;
-        return found.size() == 1 ? Optional.of(found.get(0)) : Optional.empty();
+        List<ZoneNames> zones = ask(OfficeTables::zones).stream().map(zone -> zone.row().names()).toList();
+        List<ZoneNames> exact = zones.stream().filter(one -> one.zone().key().equals(named)
+                || one.zone().transfer().equals(named)).toList();
+        List<ZoneNames> found = exact.isEmpty() ? zones.stream().filter(one -> one.tag().equals(named)).toList()
+                : exact;
+        return found.size() == 1 ? Optional.of(found.get(0).zone()) : Optional.empty();
     }
 
     /** The register that holds today, by plant. */

@@ -57,6 +57,11 @@ public record RankQuery(Optional<String> plant, Optional<String> area, Optional<
         return new RankQuery(plant, area, material, finding, olderThan, age);
     }
 
+    /** Whether it holds every zone there is. */
+    boolean holdsAll() {
+        return equals(ALL.staleAfter(staleAfter));
+    }
+
     boolean holds(RankedZone zone) {
         return plant.filter(id -> !zone.zone().plant().equals(id)).isEmpty()
                 && area.filter(name -> !zone.names().area().equals(name)).isEmpty()

@@ -2,21 +2,25 @@ package bedmark.office;
 
 import bedmark.engine.verdict.Level;
 import bedmark.index.office.OfficeTables;
+import bedmark.index.office.PackedZone;
+import bedmark.index.office.Standing;
 import bedmark.index.office.Verdict;
+import bedmark.index.office.ZoneGist;
 import bedmark.index.office.ZoneRow;
-import bedmark.survey.InspectionStatus;
 import bedmark.survey.merge.ZoneId;
 import java.time.Duration;
 import java.time.Instant;
 import java.time.LocalDate;
 import java.time.ZonedDateTime;
+import java.util.AbstractList;
 import java.util.Arrays;
 import java.util.Collection;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.OptionalLong;
+import java.util.RandomAccess;
+import java.util.function.Consumer;
 import java.util.function.Function;
 import java.util.stream.Stream;
 
@@ -28,54 +32,74 @@ final class Ranking {
     /** From so many on it pays to share the work among the processors. */
     private static final int MANY = 10_000;
     private static final double UNKNOWN = -1;
-    private static final Comparator<RankedZone> BY_NUMBERS = (one, other) -> byNumbers(driveShare(one),
-            driveShare(other), saving(one), saving(other));
-    private static final Comparator<Keyed> WORST_FIRST = (one, other) -> {
-        int place = one.place.compareTo(other.place);
-        int numbers = place != 0 ? place : byNumbers(one.driveShare, other.driveShare, one.saving, other.saving);
-        return numbers != 0 ? numbers : one.zone.zone().compareTo(other.zone.zone());
-    };
+    private static final Comparator<Ordered> BY_NUMBERS =
+            Comparator.comparingDouble(Ordered::driveShare).thenComparingDouble(Ordered::saving).reversed();
+    private static final Comparator<Ordered> WORST_FIRST =
+            Comparator.comparing(Ordered::place).thenComparing(BY_NUMBERS).thenComparing(one -> one.zone.zone());
 
-    /** A zone beside the numbers that it is sorted by, each looked up once. */
-    private record Keyed(RankedZone zone, Place place, double driveShare, double saving) {
-        static Keyed of(RankedZone zone) {
-            return new Keyed(zone, zone.place(), Ranking.driveShare(zone), Ranking.saving(zone));
+    /**
+     * A zone beside what it is put in order by.
+     *
+     * @param held the findings that were accepted or shelved and stay away
+     */
+    private record Ordered(PackedZone zone, Place place, double driveShare, double saving, List<Answered> held) {
+    }
+
+    /** Zones in their order, each put together when it is looked at: of very many, few are. */
+    private final class Listed extends AbstractList<RankedZone> implements RandomAccess {
+        private final Ordered[] zones;
+
+        Listed(Ordered[] zones) {
+            this.zones = zones;
         }
-    }
 
-    private static double driveShare(RankedZone zone) {
-        return zone.driveShare().orElse(UNKNOWN);
-    }
+        @Override
+        public RankedZone get(int index) {
+            return ranked(zones[index]);
+        }
 
-    private static double saving(RankedZone zone) {
-        return zone.saving().isPresent() ? zone.saving().get().wh() : UNKNOWN;
-    }
-
-    /** The larger numbers first. */
-    private static int byNumbers(double share, double otherShare, double saving, double otherSaving) {
-        int shares = Double.compare(otherShare, share);
-        return shares != 0 ? shares : Double.compare(otherSaving, saving);
+        @Override
+        public int size() {
+            return zones.length;
+        }
     }
 
     private final Instant now;
     private final LocalDate today;
     private final RankQuery query;
+    private final boolean all;
     private final Function<ZoneId, Collection<Answered>> answers;
 
-    /** @param answers asked by several threads at once while this thread waits for them */
+    /** @param answers asked by several threads at once while this thread waits for them, and not later */
     Ranking(ZonedDateTime now, RankQuery query, Function<ZoneId, Collection<Answered>> answers) {
         this.now = now.toInstant();
         this.today = now.toLocalDate();
         this.query = query;
+        this.all = query.holdsAll();
         this.answers = answers;
     }
 
-    List<RankedZone> rank(List<ZoneRow> rows) {
-        Stream<ZoneRow> zones = rows.size() > MANY ? rows.parallelStream() : rows.stream();
-        Keyed[] keyed = zones.filter(row -> row.names().registered() || row.standing().visit().isPresent())
-                .map(this::ranked).filter(query::holds).map(Keyed::of).toArray(Keyed[]::new);
-        Arrays.parallelSort(keyed, WORST_FIRST);
-        return Stream.of(keyed).map(Keyed::zone).toList();
+    /** What is true of the zones now; whatever happens to them later does not change it. */
+    List<RankedZone> rank(List<PackedZone> rows) {
+        return new Listed(ordered(rows));
+    }
+
+    private Ordered[] ordered(List<PackedZone> rows) {
+        Stream<PackedZone> zones = rows.size() > MANY ? rows.parallelStream() : rows.stream();
+        Ordered[] ordered = zones.<Ordered>mapMulti(this::list).toArray(Ordered[]::new);
+        Arrays.parallelSort(ordered, WORST_FIRST);
+        return ordered;
+    }
+
+    /** Nothing where no register holds the zone and nobody was there, or where it is not asked for. */
+    private void list(PackedZone zone, Consumer<Ordered> list) {
+        ZoneGist gist = zone.gist();
+        if (gist.registered() || gist.visited()) {
+            Ordered ordered = ordered(zone, gist);
+            if (all || query.holds(ranked(ordered))) {
+                list.accept(ordered);
+            }
+        }
     }
 
     /**
@@ -85,74 +109,89 @@ final class Ranking {
      */
     Optional<List<RankedZone>> head(OfficeTables tables, int atMost) {
         int read = READ * atMost;
-        List<ZoneRow> rows = tables.worst(Level.OVERLOADED.ordinal(), read);
-        List<RankedZone> found = rank(rows).stream().filter(zone -> zone.place() == Place.OVERLOADED).toList();
-        if (found.size() <= atMost) {
+        List<PackedZone> rows = tables.worst(Level.OVERLOADED.ordinal(), read);
+        Ordered[] found = Stream.of(ordered(rows)).filter(one -> one.place == Place.OVERLOADED)
+                .toArray(Ordered[]::new);
+        if (found.length <= atMost) {
             return Optional.empty();
         }
         // Behind the last one that was read may stand others with its very numbers.
-        RankedZone last = found.get(atMost - 1);
-        boolean settled = rows.size() < read || BY_NUMBERS.compare(last, ranked(rows.get(read - 1))) < 0;
-        return settled ? Optional.of(found.subList(0, atMost)) : Optional.empty();
+        PackedZone last = rows.get(rows.size() - 1);
+        boolean settled = rows.size() < read || BY_NUMBERS.compare(found[atMost - 1], ordered(last, last.gist())) < 0;
+        return settled ? Optional.of(new Listed(Arrays.copyOf(found, atMost))) : Optional.empty();
     }
 
-    RankedZone ranked(ZoneRow row) {
-        Optional<Verdict> verdict = row.verdict();
-        List<FindingLine> findings = verdict.map(Verdict::findings).filter(text -> !text.isEmpty())
-                .map(FindingLine::read).orElse(List.of());
-        Collection<Answered> known = findings.isEmpty() ? List.of() : answers.apply(row.names().zone());
-        List<Answered> held = known.isEmpty() ? List.of() : findings.stream().flatMap(line -> known.stream()
-                .filter(one -> one.rule() == line.rule() && one.holds(line, today))).toList();
-        Optional<Instant> surveyed = instant(row.standing().moment());
-        Optional<Duration> age = surveyed.map(at -> at.isAfter(now) ? Duration.ZERO : Duration.between(at, now));
-        boolean stale = age.filter(own -> own.compareTo(query.staleAfter()) > 0).isPresent();
-        Optional<Level> level = verdict.map(one -> LEVELS[one.level()]);
-        return new RankedZone(row.names(), place(row, open(verdict, findings, held), stale), level,
-                row.standing().latest(), surveyed, age, stale, row.standing().visitStatus(),
-                instant(row.standing().visited()), real(verdict, Verdict::driveShare),
-                real(verdict, Verdict::skirtPower), real(verdict, Verdict::energyWh), real(verdict, Verdict::cost),
-                real(verdict, Verdict::co2), verdict.flatMap(Verdict::energyKind), verdict.flatMap(Verdict::currency),
-                saving(verdict), findings, held, row.standing().clashes(), row.standing().clockWrong());
+    private Ordered ordered(PackedZone zone, ZoneGist gist) {
+        Collection<Answered> known = gist.findings() ? answers.apply(zone.zone()) : List.of();
+        Level level = gist.level() == Verdict.NONE.level() ? Level.INCOMPLETE : LEVELS[gist.level()];
+        List<Answered> held = List.of();
+        if (!known.isEmpty()) {
+            Verdict verdict = zone.row().verdict().orElseThrow();
+            List<FindingLine> findings = FindingLine.read(verdict.findings());
+            held = findings.stream().flatMap(line -> known.stream()
+                    .filter(one -> one.rule() == line.rule() && one.holds(line, today))).toList();
+            level = held.isEmpty() ? level : open(verdict.incomplete(), findings, held);
+        }
+        return new Ordered(zone, place(gist, level), gist.driveShare().orElse(UNKNOWN), gist.saving().orElse(UNKNOWN),
+                held);
     }
 
     /** The level that is left when what was answered is taken out. */
-    private static Optional<Level> open(Optional<Verdict> verdict, List<FindingLine> findings, List<Answered> held) {
-        if (verdict.isEmpty() || held.isEmpty()) {
-            return verdict.map(one -> LEVELS[one.level()]);
-        }
-        Level open = verdict.get().incomplete() ? Level.INCOMPLETE : Level.WITHIN;
+    private static Level open(boolean incomplete, List<FindingLine> findings, List<Answered> held) {
+        Level open = incomplete ? Level.INCOMPLETE : Level.WITHIN;
         for (FindingLine line : findings) {
             if (held.stream().noneMatch(one -> one.rule() == line.rule())) {
                 open = open.or(line.level());
             }
         }
-        return Optional.of(open);
+        return open;
     }
 
-    private static Place place(ZoneRow row, Optional<Level> open, boolean stale) {
-        if (row.standing().latest().isEmpty()) {
+    private Place place(ZoneGist gist, Level open) {
+        if (!gist.surveyed()) {
             return Place.NOT_INSPECTED;
         }
-        Level level = open.orElse(Level.INCOMPLETE);
-        if (level == Level.WITHIN || level == Level.NEAR) {
-            boolean seen = row.standing().visitStatus().filter(one -> one == InspectionStatus.INSPECTED).isPresent();
-            Place healthy = level == Level.NEAR ? Place.NEAR : Place.WITHIN;
-            return !seen ? Place.NOT_INSPECTED : stale ? Place.STALE : healthy;
-        }
-        return switch (level) {
+        return switch (open) {
             case OVERLOADED -> Place.OVERLOADED;
             case UNDECIDED -> Place.UNDECIDED;
-            default -> Place.INCOMPLETE;
+            case INCOMPLETE -> Place.INCOMPLETE;
+            case NEAR, WITHIN -> !gist.inspected() ? Place.NOT_INSPECTED : stale(age(instant(gist.moment()))) ? Place.STALE
+                    : open == Level.NEAR ? Place.NEAR : Place.WITHIN;
         };
     }
 
-    private static Optional<Saving> saving(Optional<Verdict> verdict) {
-        return verdict.filter(one -> one.remedy().isPresent() && one.savingWh().isPresent()).map(one ->
-                new Saving(one.remedy().get(), one.savingWh().getAsDouble(), one.savingCost(), one.savingCo2()));
+    RankedZone ranked(PackedZone zone) {
+        return ranked(ordered(zone, zone.gist()));
     }
 
-    private static OptionalDouble real(Optional<Verdict> verdict, Function<Verdict, OptionalDouble> number) {
-        return verdict.map(number).orElse(OptionalDouble.empty());
+    private RankedZone ranked(Ordered ordered) {
+        ZoneRow row = ordered.zone.row();
+        Standing standing = row.standing();
+        Optional<Level> level = row.verdict().map(one -> LEVELS[one.level()]);
+        Verdict verdict = row.verdict().orElse(Verdict.NONE);
+        Optional<Instant> surveyed = instant(standing.moment());
+        Optional<Instant> visited = standing.visited().equals(standing.moment()) ? surveyed
+                : instant(standing.visited());
+        Optional<Duration> age = age(surveyed);
+        return new RankedZone(row.names(), ordered.place, level, standing.latest(), surveyed, age, stale(age),
+                standing.visitStatus(), visited, verdict.driveShare(), verdict.skirtPower(), verdict.energyWh(),
+                verdict.cost(), verdict.co2(), verdict.energyKind(), verdict.currency(), saving(verdict),
+                FindingLine.read(verdict.findings()), ordered.held, standing.clashes(), standing.clockWrong());
+    }
+
+    private static Optional<Saving> saving(Verdict verdict) {
+        return verdict.remedy().isPresent() && verdict.savingWh().isPresent()
+                ? Optional.of(new Saving(verdict.remedy().get(), verdict.savingWh().getAsDouble(),
+                verdict.savingCost(), verdict.savingCo2())) : Optional.empty();
+    }
+
+    /** Never negative. */
+    private Optional<Duration> age(Optional<Instant> surveyed) {
+        return surveyed.map(at -> at.isAfter(now) ? Duration.ZERO : Duration.between(at, now));
+    }
+
+    private boolean stale(Optional<Duration> age) {
+        return age.isPresent() && age.get().compareTo(query.staleAfter()) > 0;
     }
 
     private static Optional<Instant> instant(OptionalLong moment) {

@@ -66,6 +66,8 @@ class OfficeProofTest {
         "zone | update zone set drive_share = drive_share * 1.0000001 where drive_share is not null",
         "zone | update zone set level = 0 where level > 0",
         "zone | delete from zone where zone in (select zone from zone limit 1)",
+        "zone_block | update zone_block set zones = X'00'",
+        "zone_block | delete from zone_block where block in (select block from zone_block limit 1)",
         "survey | update survey set made = made + 1",
         "survey | update survey set content = X'00' where digest in (select digest from survey limit 1)",
         "deed | update deed set person = 'somebody else'",

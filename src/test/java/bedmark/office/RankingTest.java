@@ -2,6 +2,7 @@ package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import bedmark.index.office.PackedZone;
 import bedmark.index.office.Standing;
 import bedmark.index.office.Verdict;
 import bedmark.index.office.ZoneNames;
@@ -32,7 +33,7 @@ class RankingTest {
     @ParameterizedTest
     @ValueSource(ints = {0, 1, 300, 25_000})
     void zonesAreInTheSameOrderHoweverManyThereAreAndHoweverTheyCome(int zones) {
-        List<ZoneRow> rows = new ArrayList<>();
+        List<PackedZone> rows = new ArrayList<>();
         for (int i = 0; i < zones; i++) {
             rows.add(row(String.format("TP-%05d", i)));
         }
@@ -45,7 +46,7 @@ class RankingTest {
     }
 
     /** Few different numbers, so that many zones differ in nothing but their ids. */
-    private ZoneRow row(String transfer) {
+    private PackedZone row(String transfer) {
         ZoneId zone = new ZoneId("plant", transfer);
         ZoneNames names = new ZoneNames(zone, "Plant", "Area", "C1", "C1", transfer, "", "Limestone", true);
         boolean seen = random.nextInt(8) > 0;
@@ -56,7 +57,7 @@ class RankingTest {
         Verdict verdict = new Verdict(random.nextInt(5), false, share, number(), number(), OptionalDouble.empty(),
                 OptionalDouble.empty(), some(random.nextBoolean(), "widen-boards"), number(), OptionalDouble.empty(),
                 OptionalDouble.empty(), Optional.of("electrical"), Optional.of("EUR"), "");
-        return new ZoneRow(names, standing, true, some(seen, verdict));
+        return PackedZone.of(new ZoneRow(names, standing, some(seen, verdict)));
     }
 
     private OptionalDouble number() {

@@ -35,17 +35,28 @@ final class Link implements AutoCloseable {
         T read(ResultSet row) throws SQLException;
     }
 
+    /** Takes a row. */
+    @FunctionalInterface
+    interface RowTaker {
+        void take(ResultSet row) throws SQLException;
+    }
+
     <T> List<T> rows(String sql, RowReader<T> reader, Object... arguments) {
-        return guarded(() -> {
-            List<T> rows = new ArrayList<>();
+        List<T> rows = new ArrayList<>();
+        each(sql, row -> rows.add(reader.read(row)), arguments);
+        return rows;
+    }
+
+    void each(String sql, RowTaker taker, Object... arguments) {
+        guarded(() -> {
             PreparedStatement statement = prepared(sql, arguments);
             statement.setFetchSize(FETCH);
             try (ResultSet result = statement.executeQuery()) {
                 while (result.next()) {
-                    rows.add(reader.read(result));
+                    taker.take(result);
                 }
             }
-            return rows;
+            return true;
         });
     }
 

@@ -88,7 +88,7 @@ final class OfficeDatabase {
     private static void migrate(String url) {
         try {
             Flyway.configure().dataSource(url, server(url) ? null : "", server(url) ? null : "")
-                    .locations(MIGRATIONS)
+                    .locations(MIGRATIONS).javaMigrations(new PackZones())
                     .placeholders(Map.of("bytes", server(url) ? "bytea" : "blob"))
                     .load().migrate();
         } catch (FlywayException e) {

@@ -6,7 +6,6 @@ import bedmark.survey.merge.ZoneId;
 import java.nio.file.Path;
 import java.sql.ResultSet;
 import java.sql.SQLException;
-import java.util.Arrays;
 import java.util.Collection;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -14,10 +13,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.TreeMap;
-import java.util.TreeSet;
 import java.util.UUID;
 import java.util.function.Supplier;
 
@@ -25,33 +22,23 @@ import java.util.function.Supplier;
 public final class OfficeTables implements AutoCloseable {
 
     /** The version of the tables: the number of the last migration. */
-    static final String SCHEMA = "2";
+    static final String SCHEMA = "5";
     private static final String DEED = "insert into deed (seq, made_at, person, device, code, payload) "
             + "values (?, ?, ?, ?, ?, ?)";
     private static final String MOVED = "update survey set made = ?, register = ?, conveyor = ?, drive = ? "
             + "where digest = ?";
-    private static final String NAMED = "update zone set plant_name = ?, area = ?, conveyor = ?, conveyor_tag = ?, "
-            + "tag = ?, asset = ?, material = ?, registered = ? where zone = ?";
-    private static final String NEW_ZONE = "insert into zone (plant_name, area, conveyor, conveyor_tag, tag, asset, "
-            + "material, registered, zone, plant, transfer, clashes, clock_wrong, judged) "
-            + "values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, 0, false, true)";
-    private static final String STALE = "update zone set judged = false where zone = ?";
     /** Many values are joined: a database that finds rows by an index would compare each with all of them once more. */
-    private static final String WANTED = " from unnest(cast(? as varchar array)) as wanted (wanted) join ";
-    private static final String STANDS = "update zone set visit = ?, visit_status = ?, visited = ?, latest = ?, "
-            + "moment = ?, clashes = ?, clock_wrong = ?, judged = ?, level = null where zone = ?";
-    private static final String JUDGED = "update zone set judged = true, level = ?, incomplete = ?, drive_share = ?, "
-            + "skirt_power = ?, saving_wh = ?, saving_cost = ?, saving_co2 = ?, remedy = ?, energy_wh = ?, cost = ?, "
-            + "co2 = ?, energy_kind = ?, currency = ?, findings = ? where zone = ?";
-
+    static final String WANTED = " from unnest(cast(? as varchar array)) as wanted (wanted) join ";
     private static final Map<String, String> TABLES = Map.of("deed", "seq", "pack", "sha256", "register", "digest",
-            "plant", "id", "survey", "digest", "zone", "zone");
+            "plant", "id", "survey", "digest", "zone", "zone", "zone_block", "block");
 
     private final Link link;
+    private final ZoneTable zones;
     private final boolean server;
 
     private OfficeTables(Link link, boolean server) {
         this.link = link;
+        this.zones = new ZoneTable(link);
         this.server = server;
     }
 
@@ -214,7 +201,7 @@ public final class OfficeTables implements AutoCloseable {
         }
         link.run(MOVED, after.origin().createdAt(), after.origin().register(), after.origin().conveyor(),
                 CopyRow.drive(after), after.digest());
-        stale(List.of(CopyRow.drive(before), CopyRow.drive(after)));
+        zones.stale(List.of(CopyRow.drive(before), CopyRow.drive(after)));
         return true;
     }
 
@@ -260,66 +247,27 @@ public final class OfficeTables implements AutoCloseable {
 
     /** What was judged of zones whose latest result loaded one of these drives no longer holds. */
     public void staleDrives(Collection<Copy> copies) {
-        stale(copies.stream().map(CopyRow::drive).distinct().toList());
-    }
-
-    private void stale(Collection<String> drives) {
-        link.rows("select z.zone, z.judged" + WANTED
-                + "survey s on s.drive = wanted join zone z on z.latest = s.digest",
-                row -> row.getBoolean(2) ? Optional.of(row.getString(1)) : Optional.<String>empty(),
-                link.texts(drives)).stream().flatMap(Optional::stream).forEach(zone -> link.batch(STALE, zone));
-        link.runBatch(STALE);
+        zones.stale(copies.stream().map(CopyRow::drive).distinct().toList());
     }
 
     /** Names zones; those that are not there are made, those of the plant that are not named are out of register. */
-    public void name(String plant, String plantName, Collection<ZoneNames> zones) {
-        Set<String> known = new HashSet<>(link.rows("select zone from zone where plant = ?", row -> row.getString(1),
-                plant));
-        link.run("update zone set registered = false, plant_name = ?, area = '', conveyor = '', conveyor_tag = '', "
-                + "tag = transfer, asset = '', material = '' where plant = ?", plantName, plant);
-        for (ZoneNames names : zones) {
-            Object[] own = {names.plant(), names.area(), names.conveyor(), names.conveyorTag(), names.tag(),
-                names.asset(), names.material(), names.registered()};
-            if (known.contains(names.zone().key())) {
-                link.batch(NAMED, with(own, names.zone().key()));
-            } else {
-                link.batch(NEW_ZONE, with(own, names.zone().key(), names.zone().plant(), names.zone().transfer()));
-            }
-        }
-        link.runBatch(NAMED);
-        link.runBatch(NEW_ZONE);
-    }
-
-    private static Object[] with(Object[] some, Object... more) {
-        Object[] all = Arrays.copyOf(some, some.length + more.length);
-        System.arraycopy(more, 0, all, some.length, more.length);
-        return all;
+    public void name(String plant, String plantName, Collection<ZoneNames> names) {
+        zones.name(plant, plantName, names);
     }
 
     /** Makes rows for those of the zones that have none: today's register does not name them. */
-    public void addUnnamed(Collection<ZoneId> zones, String plantName) {
-        Set<ZoneId> unnamed = new TreeSet<>(zones);
-        link.rows("select zone" + WANTED + "zone on zone = wanted", row -> ZoneId.ofKey(row.getString(1)),
-                link.texts(zones.stream().map(ZoneId::key).toList())).forEach(unnamed::remove);
-        unnamed.forEach(zone -> link.batch(NEW_ZONE, plantName, "", "", "", zone.transfer(), "", "", false, zone.key(),
-                zone.plant(), zone.transfer()));
-        link.runBatch(NEW_ZONE);
+    public void addUnnamed(Collection<ZoneId> unnamed, String plantName) {
+        zones.addUnnamed(unnamed, plantName);
     }
 
     /** Says what counts of zones; they wait to be judged where there is something to judge. */
     public void put(Collection<Standing> standings) {
-        for (Standing zone : standings) {
-            link.batch(STANDS, zone.visit().orElse(null), zone.visitStatus().map(Enum::name).orElse(null),
-                    CopyRow.boxed(zone.visited()), zone.latest().orElse(null), CopyRow.boxed(zone.moment()),
-                    zone.clashes(), zone.clockWrong(), zone.latest().isEmpty(), zone.zone().key());
-        }
-        link.runBatch(STANDS);
+        zones.put(standings);
     }
 
-    /** Those of the zones that hold contents that clash. */
-    public List<ZoneId> clashing(Collection<ZoneId> zones) {
-        return link.rows("select zone" + WANTED + "zone on zone = wanted where clashes > 0",
-                row -> ZoneId.ofKey(row.getString(1)), link.texts(zones.stream().map(ZoneId::key).toList()));
+    /** Those of some zones that hold contents that clash. */
+    public List<ZoneId> clashing(Collection<ZoneId> some) {
+        return zones.clashing(some);
     }
 
     /** Which of these contents are here. */
@@ -330,47 +278,30 @@ public final class OfficeTables implements AutoCloseable {
 
     /** Zones that wait to be judged, at most so many. */
     public List<ZoneId> waiting(int atMost) {
-        return link.rows("select zone from zone where judged = false order by zone limit ?",
-                row -> ZoneId.ofKey(row.getString(1)), atMost);
+        return zones.waiting(atMost);
     }
 
     public long countWaiting() {
-        return link.rows("select count(*) from zone where judged = false", row -> row.getLong(1)).get(0);
+        return zones.countWaiting();
     }
 
     /** Keeps what was judged; nothing for a zone that can't be. */
     public void judge(Map<ZoneId, Optional<Verdict>> verdicts) {
-        verdicts.forEach((zone, judged) -> link.batch(JUDGED, judged.map(OfficeTables::values)
-                .map(values -> with(values, zone.key())).orElseGet(() -> with(new Object[14], zone.key()))));
-        link.runBatch(JUDGED);
-    }
-
-    private static Object[] values(Verdict verdict) {
-        return new Object[] {verdict.level(), verdict.incomplete(), real(verdict.driveShare()),
-            real(verdict.skirtPower()), real(verdict.savingWh()), real(verdict.savingCost()),
-            real(verdict.savingCo2()), verdict.remedy().orElse(null), real(verdict.energyWh()), real(verdict.cost()),
-            real(verdict.co2()), verdict.energyKind().orElse(null), verdict.currency().orElse(null),
-            verdict.findings()};
-    }
-
-    private static Object real(OptionalDouble value) {
-        return value.isPresent() ? (Object) value.getAsDouble() : null;
+        zones.judge(verdicts);
     }
 
     /** Every zone as it stands. */
-    public List<ZoneRow> zones() {
-        return link.rows("select " + ZoneRow.COLUMNS + " from zone", ZoneRow::read);
+    public List<PackedZone> zones() {
+        return zones.all();
     }
 
     /** Those zones of a level that load their drives most, then would save most; an index holds them in that order. */
-    public List<ZoneRow> worst(int level, int atMost) {
-        return link.rows("select " + ZoneRow.COLUMNS + " from zone where level = ? order by level, "
-                + "drive_share desc nulls last, saving_wh desc nulls last limit ?", ZoneRow::read, level, atMost);
+    public List<PackedZone> worst(int level, int atMost) {
+        return zones.worst(level, atMost);
     }
 
-    public Optional<ZoneRow> zone(ZoneId zone) {
-        return link.rows("select " + ZoneRow.COLUMNS + " from zone where zone = ?", ZoneRow::read, zone.key()).stream()
-                .findFirst();
+    public Optional<PackedZone> zone(ZoneId zone) {
+        return zones.zone(zone);
     }
 
     /** What is kept under its digest is what was taken in, or the tables are broken. */

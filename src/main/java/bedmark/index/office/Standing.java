@@ -19,4 +19,10 @@ import java.util.OptionalLong;
 public record Standing(ZoneId zone, Optional<String> visit, Optional<InspectionStatus> visitStatus,
                        OptionalLong visited, Optional<String> latest, OptionalLong moment, int clashes,
                        boolean clockWrong) {
+
+    /** Of a zone that nobody came to. */
+    static Standing none(ZoneId zone) {
+        return new Standing(zone, Optional.empty(), Optional.empty(), OptionalLong.empty(), Optional.empty(),
+                OptionalLong.empty(), 0, false);
+    }
 }

@@ -24,4 +24,10 @@ public record Verdict(int level, boolean incomplete, OptionalDouble driveShare, 
                       OptionalDouble savingWh, OptionalDouble savingCost, OptionalDouble savingCo2,
                       Optional<String> remedy, OptionalDouble energyWh, OptionalDouble cost, OptionalDouble co2,
                       Optional<String> energyKind, Optional<String> currency, String findings) {
+
+    /** Of a zone that was not judged, or could not be: no number at all. */
+    public static final Verdict NONE = new Verdict(-1, false, OptionalDouble.empty(), OptionalDouble.empty(),
+            OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty(), Optional.empty(),
+            OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty(), Optional.empty(),
+            Optional.empty(), "");
 }

@@ -16,4 +16,9 @@ import bedmark.survey.merge.ZoneId;
  */
 public record ZoneNames(ZoneId zone, String plant, String area, String conveyor, String conveyorTag, String tag,
                         String asset, String material, boolean registered) {
+
+    /** Of a zone that the register does not hold. */
+    static ZoneNames unregistered(ZoneId zone, String plant) {
+        return new ZoneNames(zone, plant, "", "", "", zone.transfer(), "", "", false);
+    }
 }

@@ -17,7 +17,7 @@ public final class EnergyModel {
 
     EnergyModel(OfficeDesk desk) {
         byArea.addListener((property, before, now) -> show());
-        desk.ask(progress -> desk.store().rank(RankQuery.ALL, progress), ranked -> {
+        desk.ask(progress -> List.copyOf(desk.store().rank(RankQuery.ALL, progress)), ranked -> {
             zones = ranked;
             show();
         });

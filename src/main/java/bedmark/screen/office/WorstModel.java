@@ -42,8 +42,10 @@ public final class WorstModel {
         // What a person sees first does not wait for the rest of a long list.
         desk.ask(progress -> desk.store().worst(query, HEAD, progress), this::show);
         desk.ask(progress -> {
-            List<RankedZone> every = desk.store().rank(RankQuery.ALL, progress);
-            return List.of(every, query.equals(RankQuery.ALL) ? every : desk.store().rank(query, progress));
+            // Put together here, and not by the screen's thread each time that it looks at all of them.
+            List<RankedZone> every = List.copyOf(desk.store().rank(RankQuery.ALL, progress));
+            return List.of(every, query.equals(RankQuery.ALL) ? every
+                    : List.copyOf(desk.store().rank(query, progress)));
         }, lists -> {
             all.set(lists.get(0));
             show(lists.get(1));

@@ -2,25 +2,38 @@ package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertNotNull;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import bedmark.journal.Digest;
 import bedmark.journal.Progress;
+import bedmark.quantity.UnitSystem;
+import bedmark.report.ReportContent;
+import bedmark.report.ReportFile;
+import bedmark.report.ReportOptions;
+import bedmark.report.paper.PaperSize;
+import bedmark.wording.Wording;
+import bedmark.words.Words;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Random;
+import java.util.Set;
 import java.util.TreeMap;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.stream.Stream;
+import java.util.zip.ZipEntry;
+import java.util.zip.ZipFile;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Tag;
@@ -55,7 +68,8 @@ class SharedOfficeTest {
 
     /**
      * Eight desks receive overlapping packs, each in an order of its own, while the server is ended without warning and
-     * started again. A folder that received the same packs is the measure: nothing is lost and nothing doubled.
+     * started again. A folder that received the same packs is the measure: nothing is lost and nothing doubled, and the
+     * export for analysis and the report are the same.
      */
     @Test
     void eightDesksAndARestartLoseNothingAndDoubleNothing() throws Exception {
@@ -90,6 +104,7 @@ class SharedOfficeTest {
             new OfficeExport(alone).write(folder.resolve("export-alone"), Progress.NONE);
             new OfficeExport(shared).write(folder.resolve("export-shared"), Progress.NONE);
             assertEquals(files(folder.resolve("export-alone")), files(folder.resolve("export-shared")));
+            assertEquals(report(alone, folder.resolve("report-alone")), report(shared, folder.resolve("report-shared")));
         }
     }
 
@@ -104,6 +119,28 @@ class SharedOfficeTest {
             }
         }
         return received;
+    }
+
+    /** The report as every kind of file; a workbook also keeps the moment at which it was written. */
+    private static Map<String, String> report(OfficeStore store, Path into) throws IOException {
+        ReportContent content = ReportContent.of(store, RankQuery.ALL, OffsetDateTime.now(Offices.NOW), Progress.NONE)
+                .orElseThrow();
+        ReportOptions options = new ReportOptions(new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC),
+                PaperSize.A4, store::photo, "Bedmark", Progress.NONE);
+        Files.createDirectories(into);
+        for (ReportFile.Kind kind : ReportFile.Kind.values()) {
+            ReportFile.write(into.resolve("report" + kind.ending()), kind, content, options);
+        }
+        Map<String, String> digests = files(into);
+        assertEquals(Set.of("report.pdf", "report.xlsx", "report.csv"), digests.keySet());
+        digests.remove("report.xlsx");
+        try (ZipFile workbook = new ZipFile(into.resolve("report.xlsx").toFile())) {
+            for (ZipEntry part : Collections.list(workbook.entries())) {
+                digests.put(part.getName(), Digest.of(workbook.getInputStream(part).readAllBytes()).hex());
+            }
+        }
+        assertNotNull(digests.remove("docProps/core.xml"));
+        return digests;
     }
 
     private static Map<String, String> files(Path folder) throws IOException {

@@ -3,12 +3,14 @@ package bedmark.bench;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 
 /**
  * The transfer point in a store of 5,000 surveys: how long it takes to open, and what a key costs the screen's thread,
- * in a process of its own with a headless glass.
+ * in a process of its own with a headless glass and the
+ * launcher's options.
  */
 final class ScreenSuite implements Suite {
     private static final int SURVEYS = Integer.getInteger("bench.screen.surveys", 5_000);
@@ -47,11 +49,13 @@ final class ScreenSuite implements Suite {
     }
 
     private static String said(Path store) throws IOException, InterruptedException {
-        Process process = new ProcessBuilder(Path.of(System.getProperty("java.home"), "bin", "java").toString(),
-                "-Dglass.platform=Monocle", "-Dmonocle.platform=Headless", "-Dprism.order=sw",
+        List<String> command = new ArrayList<>();
+        command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
+        command.addAll(StartedProgram.launcherOptions());
+        command.addAll(List.of("-Dglass.platform=Monocle", "-Dmonocle.platform=Headless", "-Dprism.order=sw",
                 "-Dheadless.geometry=1280x800-32", "-cp", System.getProperty("java.class.path"),
-                ScreenProbe.class.getName(), store.toString(), Integer.toString(OPENS), Integer.toString(KEYS))
-                .redirectErrorStream(true).start();
+                ScreenProbe.class.getName(), store.toString(), Integer.toString(OPENS), Integer.toString(KEYS)));
+        Process process = new ProcessBuilder(command).redirectErrorStream(true).start();
         String said = new String(process.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
         if (process.waitFor() != 0) {
             throw new IOException(said);

@@ -54,9 +54,14 @@ record StartedProgram(List<String> command, BenchDisplay display) {
                 display);
     }
 
+    /** The options that the launcher starts the program with. */
+    static List<String> launcherOptions() throws IOException {
+        return FLAG.matcher(Files.readString(LAUNCHED.resolve("bin/bedmark"))).results().map(MatchResult::group)
+                .toList();
+    }
+
     private static List<String> flags(Path home, BenchDisplay display) throws IOException {
-        List<String> flags = new ArrayList<>(FLAG.matcher(Files.readString(LAUNCHED.resolve("bin/bedmark"))).results()
-                .map(MatchResult::group).toList());
+        List<String> flags = new ArrayList<>(launcherOptions());
         flags.addAll(List.of("-Xlog:disable", "-Dfile.encoding=UTF-8", "-Duser.home=" + home,
                 "-Dbedmark.home=" + LAUNCHED.toAbsolutePath()));
         flags.addAll(display.flags());

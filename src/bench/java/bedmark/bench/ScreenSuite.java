@@ -9,8 +9,7 @@ import java.util.List;
 
 /**
  * The transfer point in a store of 5,000 surveys: how long it takes to open, and what a key costs the screen's thread,
- * in a process of its own with a headless glass and the
- * launcher's options.
+ * in a process of its own with a headless glass and the launcher's options.
  */
 final class ScreenSuite implements Suite {
     private static final int SURVEYS = Integer.getInteger("bench.screen.surveys", 5_000);

@@ -29,7 +29,7 @@ final class PicturePane extends StackPane {
     private Optional<Drawn> drawn = Optional.empty();
 
     /** What the picture was drawn of; a key that changes none of it draws nothing. */
-    private record Drawn(Branch document, ZoneModel.Outcome outcome, Optional<Integer> line, double speed) {
+    private record Drawn(Branch document, Outcome outcome, Optional<Integer> line, double speed) {
         private boolean is(Drawn other) {
             return document == other.document && outcome == other.outcome && line.equals(other.line)
                     && Double.compare(speed, other.speed) == 0;

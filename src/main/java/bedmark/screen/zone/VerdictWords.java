@@ -28,7 +28,7 @@ final class VerdictWords {
         this.telling = new Telling(wording, form);
     }
 
-    Verdict of(ZoneModel.Outcome outcome) {
+    Verdict of(Outcome outcome) {
         return outcome.assessment().map(this::of).orElseGet(() -> impossible(outcome));
     }
 
@@ -60,7 +60,7 @@ final class VerdictWords {
                         defect.details())).orElse(defect);
     }
 
-    private Verdict impossible(ZoneModel.Outcome outcome) {
+    private Verdict impossible(Outcome outcome) {
         String why = outcome.impossible().map(refused -> wording.sentence(named(refused.defect()))).orElse("");
         return new Verdict(LevelShape.INCOMPLETE, wording.text("verdict.level.incomplete"),
                 wording.text("verdict.impossible", why), "", List.of(), Optional.empty());

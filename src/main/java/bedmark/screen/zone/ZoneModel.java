@@ -4,8 +4,6 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
-import bedmark.engine.Assessment;
-import bedmark.engine.LoadingZone;
 import bedmark.form.Measure;
 import bedmark.form.SpeedField;
 import bedmark.quantity.BeltState;
@@ -16,7 +14,6 @@ import bedmark.quantity.TypedNumber;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import bedmark.survey.Assessor;
-import bedmark.survey.Survey;
 import bedmark.survey.SurveyHistory;
 import java.util.HashSet;
 import java.util.List;
@@ -112,14 +109,6 @@ public final class ZoneModel {
         return setting.form().gaps(document()).stream().filter(gap -> open())
                 .flatMap(gap -> slots().stream().filter(slot -> slot.field().equals(gap))).findFirst()
                 .orElseGet(() -> slots().get(0));
-    }
-
-    /**
-     * What the survey comes to: an assessment, or why there can be none.
-     *
-     * @param zone what the engine sees of the survey, where it can be
-     */
-    public record Outcome(Optional<Assessment> assessment, Optional<Refused> impossible, Optional<LoadingZone> zone) {
     }
 
     public ZoneSetting setting() {
@@ -460,15 +449,7 @@ public final class ZoneModel {
     }
 
     private Outcome judge(Branch document) {
-        Assessor assessor = setting.assessor();
-        try {
-            Survey judged = new Survey(document);
-            LoadingZone zone = assessor.zone(judged);
-            return new Outcome(Optional.of(assessor.assess(new Assessor.Seen(judged, zone), companions)),
-                    Optional.empty(), Optional.of(zone));
-        } catch (Refused e) {
-            return new Outcome(Optional.empty(), Optional.of(e), Optional.empty());
-        }
+        return Outcome.of(document, setting.assessor(), companions);
     }
 
     private static Optional<Quantity> quantity(Branch document, Pointer where) {

@@ -214,7 +214,7 @@ public final class ZoneView implements Screen {
         next.ifPresentOrElse(row -> navigator.toZone(round, row), () -> navigator.toRound(round));
     }
 
-    private void judged(ZoneModel.Outcome outcome) {
+    private void judged(Outcome outcome) {
         Verdict shown = verdictWords.of(outcome);
         verdict.show(shown);
         picture.describe(tag() + ". " + shown.sentence());

@@ -1,0 +1,30 @@
+package bedmark.screen.zone;
+
+import bedmark.document.Branch;
+import bedmark.document.Refused;
+import bedmark.engine.Assessment;
+import bedmark.engine.LoadingZone;
+import bedmark.survey.Assessor;
+import bedmark.survey.Survey;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * What a survey comes to: an assessment, or why there can be none.
+ *
+ * @param zone what the engine sees of the survey, where it can be
+ */
+public record Outcome(Optional<Assessment> assessment, Optional<Refused> impossible, Optional<LoadingZone> zone) {
+
+    /** @param companions the other surveys of the conveyor's round, as the engine sees them */
+    static Outcome of(Branch document, Assessor assessor, List<Assessor.Seen> companions) {
+        try {
+            Survey judged = new Survey(document);
+            LoadingZone zone = assessor.zone(judged);
+            return new Outcome(Optional.of(assessor.assess(new Assessor.Seen(judged, zone), companions)),
+                    Optional.empty(), Optional.of(zone));
+        } catch (Refused e) {
+            return new Outcome(Optional.empty(), Optional.of(e), Optional.empty());
+        }
+    }
+}

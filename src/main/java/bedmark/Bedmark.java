@@ -23,7 +23,6 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
 import java.util.Optional;
-import java.util.function.BooleanSupplier;
 import java.util.function.Supplier;
 
 /** The program: wires its parts by hand and hands over to a command or to the screen. */
@@ -47,41 +46,41 @@ public final class Bedmark {
         return !linux || System.getenv("DISPLAY") != null || System.getenv("WAYLAND_DISPLAY") != null;
     }
 
-    /** What a window is opened for, in sight of a person who may have no terminal. */
-    private static boolean inSight(Supplier<Preferences> preferences, BooleanSupplier opening) {
-        if (!hasDisplay()) {
-            return false;
-        }
+    /** Opens what a window is to show; who started the program by its icon has no terminal to read why it fails. */
+    private static <T> T opened(Supplier<Preferences> preferences, Supplier<T> opening) {
         try {
-            return opening.getAsBoolean();
-        } catch (Refused e) {
+            return opening.get();
+        } catch (RuntimeException e) {
             BedmarkApp.awaitToolkit();
-            RefusalWindow.show(preferences.get(), e.defect());
+            RefusalWindow.show(preferences.get(), Refused.reason(e), CLOCK);
             throw e;
         }
     }
 
     private static boolean show(Path file) {
+        if (!hasDisplay()) {
+            return false;
+        }
         Path home = Path.of(System.getProperty("user.home"));
-        return inSight(() -> ArrivalModel.preferences(home), () ->
-                ArrivalApp.open(file, FileKind.of(file), home, CLOCK));
+        FileKind kind = opened(() -> ArrivalModel.preferences(home), () -> FileKind.of(file));
+        return ArrivalApp.open(file, kind, home, CLOCK);
     }
 
     private static boolean open(Path folder, Optional<Path> samples, boolean load) {
-        return inSight(() -> new PreferencesFile(folder).read(), () -> window(folder, samples, load));
-    }
-
-    private static boolean window(Path folder, Optional<Path> samples, boolean load) {
+        if (!hasDisplay()) {
+            return false;
+        }
+        Supplier<Preferences> preferences = () -> new PreferencesFile(folder).read();
         if (OfficeStore.isOffice(folder)) {
-            return OfficeApp.open(OfficeStore.open(folder, OfficeOptions.of(CLOCK)), CLOCK);
+            return OfficeApp.open(opened(preferences, () -> OfficeStore.open(folder, OfficeOptions.of(CLOCK))), CLOCK);
         }
         BedmarkApp.prepare(folder, CLOCK);
         StoreOptions options = BedmarkApp.options(CLOCK);
-        if (new StoreFolder(folder, options).sealed()) {
+        if (opened(preferences, () -> new StoreFolder(folder, options).sealed())) {
             return BedmarkApp.unlock(folder, passphrase -> Store.open(folder,
                     options.withPassphrase(Optional.of(passphrase))), CLOCK, samples);
         }
-        try (Store store = Store.open(folder, options)) {
+        try (Store store = opened(preferences, () -> Store.open(folder, options))) {
             return BedmarkApp.open(store, CLOCK, samples, load);
         }
     }

@@ -122,8 +122,7 @@ public final class BedmarkCommand implements Callable<Integer> {
         if (failure instanceof Misread misread) {
             return Wording.plain(misread.file.toString()) + ": " + sentence(surroundings, misread.refused);
         }
-        return surroundings.wording().sentence(failure instanceof Refused refused ? refused.defect()
-                : Defect.in("", "program-failed", failure.getClass().getSimpleName()));
+        return surroundings.wording().sentence(Refused.reason(failure));
     }
 
     /** A refusal, and the file that it is about. */

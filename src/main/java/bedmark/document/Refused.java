@@ -25,6 +25,12 @@ public final class Refused extends RuntimeException {
         }
     }
 
+    /** Why something failed, for a person: the reason of a refusal, else that the program itself failed. */
+    public static Defect reason(Exception failure) {
+        return failure instanceof Refused refused ? refused.defect
+                : Defect.in("", "program-failed", failure.getClass().getSimpleName());
+    }
+
     public Defect defect() {
         return defect;
     }

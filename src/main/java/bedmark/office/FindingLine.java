@@ -8,7 +8,6 @@ import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Rule;
 import bedmark.engine.verdict.Sense;
 import java.math.BigDecimal;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -61,25 +60,12 @@ public record FindingLine(Rule rule, Level level, double observed, double standa
                 .collect(Collectors.joining("\n"));
     }
 
-    /** What {@link #write} wrote. */
     static List<FindingLine> read(String text) {
-        if (text.isEmpty()) {
-            return List.of();
-        }
-        List<FindingLine> lines = new ArrayList<>();
-        for (int begin = 0; begin < text.length();) {
-            int end = text.indexOf('\n', begin);
-            end = end < 0 ? text.length() : end;
-            int level = text.indexOf(' ', begin) + 1;
-            int observed = text.indexOf(' ', level) + 1;
-            int uncertainty = text.indexOf(' ', observed) + 1;
-            lines.add(new FindingLine(rule(text.substring(begin, level - 1)),
-                    level(text.substring(level, observed - 1)),
-                    Double.parseDouble(text.substring(observed, uncertainty - 1)),
-                    Double.parseDouble(text.substring(uncertainty, end))));
-            begin = end + 1;
-        }
-        return List.copyOf(lines);
+        return text.lines().map(line -> {
+            String[] parts = line.split(" ");
+            return new FindingLine(rule(parts[0]), level(parts[1]), Double.parseDouble(parts[2]),
+                    Double.parseDouble(parts[3]));
+        }).toList();
     }
 
     /** As a deed keeps it. */

@@ -226,8 +226,8 @@ final class Receiving {
         Set<ZoneId> clashing = new HashSet<>(tables.clashing(packs.stream()
                 .flatMap(pack -> pack.pack().intake().zones().stream()).collect(Collectors.toSet())));
         for (int i = fresh.size() - 1; i >= 0; i--) {
-            Set<ZoneId> own = packs.get(i).pack().intake().zones();
-            own.retainAll(clashing);
+            Set<ZoneId> own = packs.get(i).pack().intake().zones().stream().filter(clashing::contains)
+                    .collect(Collectors.toSet());
             List<Copy> copies = own.isEmpty() ? List.of() : tables.copies(own).stream()
                     .filter(copy -> !later.contains(copy.digest())).toList();
             clashes.add(0, Merge.zones(copies, aside).values().stream().flatMap(zone -> zone.clashes().stream())

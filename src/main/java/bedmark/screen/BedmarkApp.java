@@ -5,6 +5,7 @@ import bedmark.diary.Happening;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
 import bedmark.screen.round.RoundModel;
+import bedmark.screen.start.LonePage;
 import bedmark.screen.start.UnlockModel;
 import bedmark.screen.start.UnlockView;
 import bedmark.screen.theme.Density;
@@ -171,10 +172,15 @@ public final class BedmarkApp extends Application {
         UnlockView view = new UnlockView(new Wording(new Words(preferences.locale()), preferences.units()),
                 new UnlockModel(given.opening(), Platform::runLater),
                 store -> work(stage, given, Begun.at(store, given.clock(), given.samples())));
-        Scene scene = new Scene(view, WIDTH, HEIGHT);
-        Theme.apply(scene, preferences.night() ? Light.NIGHT : Light.DAY, Shell.density(preferences));
+        show(stage, view, preferences, given.clock());
+    }
+
+    /** Shows a page that stands without a store as the person likes the screen. */
+    static void show(Stage stage, LonePage page, Preferences preferences, Clock clock) {
+        Scene scene = new Scene(page, WIDTH, HEIGHT);
+        Theme.apply(scene, preferences.lighting().at(LocalTime.now(clock)), Shell.density(preferences));
         stage.setScene(scene);
-        view.focus();
+        page.focus();
     }
 
     private void work(Stage stage, Launch given, Begun begun) {

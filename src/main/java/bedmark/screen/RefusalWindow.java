@@ -2,20 +2,15 @@ package bedmark.screen;
 
 import bedmark.document.Defect;
 import bedmark.screen.start.RefusedView;
-import bedmark.screen.theme.Light;
-import bedmark.screen.theme.Theme;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
+import java.time.Clock;
 import java.util.concurrent.CountDownLatch;
 import javafx.application.Platform;
-import javafx.scene.Scene;
 import javafx.stage.Stage;
 
 /** The window in place of one that could not be opened. */
 public final class RefusalWindow {
-    private static final double WIDTH = 1280;
-    private static final double HEIGHT = 800;
-
     private RefusalWindow() {
     }
 
@@ -24,8 +19,10 @@ public final class RefusalWindow {
      * the terminal. Not to be called by the screen.
      *
      * @param preferences how the person likes the screen
+     * @param clock       by which it may be set for night
      */
-    public static void show(Preferences preferences, Defect why) {
+    public static void show(Preferences preferences, Defect why, Clock clock) {
+        ToolkitNotes.hush();
         CountDownLatch closed = new CountDownLatch(1);
         try {
             Platform.startup(() -> { });
@@ -34,7 +31,7 @@ public final class RefusalWindow {
         } catch (UnsupportedOperationException e) {
             return;
         }
-        Platform.runLater(() -> stage(preferences, why).setOnHidden(event -> closed.countDown()));
+        Platform.runLater(() -> stage(preferences, why, clock).setOnHidden(event -> closed.countDown()));
         try {
             closed.await();
         } catch (InterruptedException e) {
@@ -42,16 +39,13 @@ public final class RefusalWindow {
         }
     }
 
-    private static Stage stage(Preferences preferences, Defect why) {
+    private static Stage stage(Preferences preferences, Defect why, Clock clock) {
         Stage stage = new Stage();
         RefusedView view = new RefusedView(new Wording(new Words(preferences.locale()), preferences.units()), why,
                 stage::close);
-        Scene scene = new Scene(view, WIDTH, HEIGHT);
-        Theme.apply(scene, preferences.night() ? Light.NIGHT : Light.DAY, Shell.density(preferences));
         stage.setTitle("Bedmark");
-        stage.setScene(scene);
+        BedmarkApp.show(stage, view, preferences, clock);
         stage.show();
-        view.focus();
         return stage;
     }
 }

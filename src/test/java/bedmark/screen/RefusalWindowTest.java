@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Defect;
+import java.time.Clock;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -27,7 +28,7 @@ class RefusalWindowTest {
         Glass.on(() -> null);
         Preferences liked = Preferences.standard().withLocale(Locale.forLanguageTag(language)).withNight(night);
         CompletableFuture<Void> closed = CompletableFuture.runAsync(() ->
-                RefusalWindow.show(liked, Defect.in("/survey/store", "store-locked")));
+                RefusalWindow.show(liked, Defect.in("/survey/store", "store-locked"), Clock.systemUTC()));
         WaitForAsyncUtils.waitFor(30, TimeUnit.SECONDS, () -> Glass.on(() -> shown().isPresent()));
         Scene scene = Glass.on(() -> shown().orElseThrow());
         List<String> findings = Glass.on(() -> {

@@ -39,7 +39,7 @@ public final class PackedZone {
 
     /** A zone of a block. */
     static Optional<PackedZone> find(byte[] block, ZoneId zone) {
-        PackedReader in = new PackedReader(block, 0);
+        PackedReader in = ZoneBlock.proved(block);
         while (!in.atEnd()) {
             int at = in.at();
             in.pass();

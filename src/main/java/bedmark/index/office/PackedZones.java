@@ -18,7 +18,7 @@ final class PackedZones extends AbstractList<PackedZone> implements RandomAccess
     private int size;
 
     void add(byte[] block) {
-        PackedReader in = new PackedReader(block, 0);
+        PackedReader in = ZoneBlock.proved(block);
         while (!in.atEnd()) {
             if (size == places.length) {
                 places = Arrays.copyOf(places, 2 * size);

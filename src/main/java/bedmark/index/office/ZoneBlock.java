@@ -2,12 +2,14 @@ package bedmark.index.office;
 
 import bedmark.document.Pointer;
 import bedmark.survey.merge.ZoneId;
+import java.nio.ByteBuffer;
 import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.stream.IntStream;
+import java.util.zip.CRC32C;
 
 /**
  * Some zones of one plant, packed into one row of the table {@code zone_block}: a sixteenth of the plant's, always the
@@ -17,6 +19,7 @@ final class ZoneBlock {
     /** Small enough that a pack need not write all of a large plant, and large enough that all plants are few rows. */
     private static final int OF_A_PLANT = 16;
     private static final byte[] NONE = {};
+    private static final int SUM = Integer.BYTES;
     /** Most zones need less (bytes). */
     private static final int ROOM_FOR_ONE = 256;
 
@@ -34,7 +37,7 @@ final class ZoneBlock {
 
     static ZoneBlock of(String key, byte[] bytes) {
         ZoneBlock block = new ZoneBlock(key);
-        PackedReader in = new PackedReader(bytes, 0);
+        PackedReader in = proved(bytes);
         while (!in.atEnd()) {
             block.zones.put(PackedZone.zone(in), new Parts(in.bytes(), in.bytes(), in.bytes()));
         }
@@ -100,9 +103,29 @@ final class ZoneBlock {
         changed = true;
     }
 
+    /** The zones behind a check sum over them, since a database does not notice when its file changes under it. */
     byte[] bytes() {
         PackedWriter out = new PackedWriter(ROOM_FOR_ONE * zones.size());
         zones.forEach((zone, parts) -> PackedZone.write(out, zone, parts.names, parts.standing, parts.verdict));
-        return out.bytes();
+        byte[] packed = out.bytes();
+        return ByteBuffer.allocate(SUM + packed.length).putInt(sum(packed, 0)).put(packed).array();
+    }
+
+    /**
+     * Reads the zones of a block's bytes.
+     *
+     * @throws OfficeBroken where they are not as they were written
+     */
+    static PackedReader proved(byte[] bytes) {
+        if (bytes.length < SUM || ByteBuffer.wrap(bytes).getInt() != sum(bytes, SUM)) {
+            throw new OfficeBroken("a block of zones is not as it was written");
+        }
+        return new PackedReader(bytes, SUM);
+    }
+
+    private static int sum(byte[] bytes, int from) {
+        CRC32C sum = new CRC32C();
+        sum.update(bytes, from, bytes.length - from);
+        return (int) sum.getValue();
     }
 }

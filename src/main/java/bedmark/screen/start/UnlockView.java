@@ -3,7 +3,6 @@ package bedmark.screen.start;
 import bedmark.index.Store;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Texts;
-import bedmark.screen.part.TopBar;
 import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
 import java.util.function.Consumer;
@@ -11,23 +10,15 @@ import javafx.scene.control.Label;
 import javafx.scene.control.PasswordField;
 import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
-import javafx.scene.layout.BorderPane;
-import javafx.scene.layout.Region;
-import javafx.scene.layout.VBox;
 
 /** Asks for the passphrase of a store that is encrypted, and says plainly what a lost one means. */
-public final class UnlockView extends BorderPane {
-    private static final double WIDEST = 720;
-
+public final class UnlockView extends LonePage {
     private final PasswordField hidden = new PasswordField();
     private final TextField shown = new TextField();
 
     /** @param opened takes the store once it is open */
     public UnlockView(Wording wording, UnlockModel model, Consumer<Store> opened) {
-        TopBar bar = new TopBar();
-        bar.titleProperty().set(wording.text("screen.name"));
-        bar.subtitleProperty().set(wording.text("store.unlock.title"));
-        setTop(bar);
+        super(wording, wording.text("store.unlock.title"));
         shown.textProperty().bindBidirectional(hidden.textProperty());
         hidden.setId("passphrase");
         shown.setId("passphrase-shown");
@@ -59,15 +50,12 @@ public final class UnlockView extends BorderPane {
         });
         Label working = Texts.wrapped(wording.text("store.unlock.working"));
         working.visibleProperty().bind(model.busyProperty());
-        VBox asked = new VBox(Texts.wrapped(wording.text("store.unlock.what")), hidden, shown, show, trouble, open,
-                working, Texts.wrapped(wording.text("store.unlock.lost")));
-        asked.getStyleClass().add("questions");
-        asked.setMaxWidth(WIDEST);
-        asked.setMaxHeight(Region.USE_PREF_SIZE);
-        setCenter(asked);
+        say(Texts.wrapped(wording.text("store.unlock.what")), hidden, shown, show, trouble, open, working,
+                Texts.wrapped(wording.text("store.unlock.lost")));
     }
 
     /** Where the person types at once. */
+    @Override
     public void focus() {
         hidden.requestFocus();
     }

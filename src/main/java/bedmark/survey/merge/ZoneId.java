@@ -27,11 +27,6 @@ public record ZoneId(String plant, String transfer) implements Comparable<ZoneId
 
     /** The zone of a {@link #key()}. */
     public static ZoneId ofKey(String key) {
-        int second = key.indexOf('/', 1);
-        // Hardly any id holds what a pointer escapes, and very many keys are read at once.
-        if (second > 0 && key.charAt(0) == '/' && key.indexOf('~') < 0 && key.indexOf('/', second + 1) < 0) {
-            return new ZoneId(key.substring(1, second), key.substring(second + 1));
-        }
         List<String> tokens = Pointer.parse(key).tokens();
         if (tokens.size() != 2) {
             throw new IllegalArgumentException("no zone: " + key);

@@ -80,11 +80,28 @@ class PackedZoneTest {
 
     @Test
     void bytesThatEndTooEarlyAreABrokenTable() {
-        byte[] bytes = block(List.of(row(new ZoneId("plant", "TP-1")))).bytes();
-        for (int length = 1; length < bytes.length; length++) {
-            byte[] cut = Arrays.copyOf(bytes, length);
+        byte[] block = block(List.of(row(new ZoneId("plant", "TP-1")))).bytes();
+        for (int length = 0; length < block.length; length++) {
+            byte[] cut = Arrays.copyOf(block, length);
             assertThrows(OfficeBroken.class, () -> ZoneBlock.of("", cut), () -> "cut to " + cut.length);
-            assertThrows(OfficeBroken.class, () -> new PackedZones().add(cut), () -> "cut to " + cut.length);
+        }
+        byte[] values = new PackedWriter(8).text("TP-1").whole(OptionalLong.of(7)).real(OptionalDouble.of(0.5))
+                .digest(Optional.of("ab12")).flag(true).bytes();
+        for (int length = 0; length < values.length; length++) {
+            PackedReader in = new PackedReader(Arrays.copyOf(values, length), 0);
+            assertThrows(OfficeBroken.class, () -> List.of(in.text(), in.whole(), in.real(), in.digest(), in.flag()));
+        }
+    }
+
+    @Test
+    void everyFlippedBitOfABlockIsNoticed() {
+        byte[] bytes = block(List.of(row(new ZoneId("plant", "TP-1")), row(new ZoneId("plant", "TP-2")))).bytes();
+        for (int bit = 0; bit < bytes.length * Byte.SIZE; bit++) {
+            byte[] flipped = bytes.clone();
+            flipped[bit / Byte.SIZE] ^= (byte) (1 << bit % Byte.SIZE);
+            assertThrows(OfficeBroken.class, () -> ZoneBlock.of("", flipped));
+            assertThrows(OfficeBroken.class, () -> new PackedZones().add(flipped));
+            assertThrows(OfficeBroken.class, () -> PackedZone.find(flipped, new ZoneId("plant", "TP-2")));
         }
     }
 

@@ -8,7 +8,6 @@ import java.math.BigDecimal;
 import java.time.DateTimeException;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
-import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -20,27 +19,33 @@ import java.util.UUID;
  * key and refuse a value of the wrong kind, naming the key; the caller places the refusal with
  * {@link Defect#below(Pointer)} where the branch is not the root.
  */
-public record Branch(Map<String, Node> members) implements Node {
+public record Branch(Members members) implements Node {
 
     /** The empty object. */
     public static final Branch EMPTY = new Branch(Map.of());
 
-    public Branch {
-        members = Collections.unmodifiableMap(new LinkedHashMap<>(members));
+    /** An object of a map's members, in its order. */
+    public Branch(Map<String, Node> members) {
+        this(Members.of(members));
+    }
+
+    /** An object of what was gathered. */
+    public Branch(Members.Gathering gathered) {
+        this(gathered.members());
     }
 
     public Optional<Node> get(String key) {
-        return Optional.ofNullable(members.get(key)).filter(node -> !(node instanceof Blank));
+        Node node = members.get(key);
+        return node == null || node instanceof Blank ? Optional.empty() : Optional.of(node);
     }
 
     public boolean has(String key) {
-        return get(key).isPresent();
+        Node node = members.get(key);
+        return node != null && !(node instanceof Blank);
     }
 
     public Branch with(String key, Node value) {
-        Map<String, Node> changed = new LinkedHashMap<>(members);
-        changed.put(key, value);
-        return new Branch(changed);
+        return new Branch(members.with(key, value));
     }
 
     public Branch with(String key, String value) {
@@ -52,9 +57,7 @@ public record Branch(Map<String, Node> members) implements Node {
     }
 
     public Branch without(String key) {
-        Map<String, Node> changed = new LinkedHashMap<>(members);
-        changed.remove(key);
-        return new Branch(changed);
+        return new Branch(members.without(key));
     }
 
     /** The value at a place below this branch. */

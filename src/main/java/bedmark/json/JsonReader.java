@@ -2,6 +2,7 @@ package bedmark.json;
 
 import bedmark.document.Branch;
 import bedmark.document.Defect;
+import bedmark.document.Members;
 import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
@@ -22,7 +23,6 @@ import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.HashMap;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -43,16 +43,19 @@ public final class JsonReader {
 
     private final JsonParser parser;
     private final boolean placing;
+    private final boolean sure;
     private final Predicate<JsonStreamContext> passed;
     private final Map<Pointer, Document.Place> places = new HashMap<>();
 
     /**
      * @param placing whether the place of each value is kept
+     * @param sure    whether every text is known to be well-formed and of sensible length
      * @param passed  which objects are only read over
      */
-    private JsonReader(JsonParser parser, boolean placing, Predicate<JsonStreamContext> passed) {
+    private JsonReader(JsonParser parser, boolean placing, boolean sure, Predicate<JsonStreamContext> passed) {
         this.parser = parser;
         this.placing = placing;
+        this.sure = sure;
         this.passed = passed;
     }
 
@@ -106,7 +109,8 @@ public final class JsonReader {
             return Optional.empty();
         }
         try (JsonParser parser = factory.createParser(bytes)) {
-            return Optional.of(new JsonReader(parser, false, passed).document());
+            boolean sure = bytes.length <= LONGEST_TEXT && WellFormed.isSure(bytes);
+            return Optional.of(new JsonReader(parser, false, sure, passed).document());
         } catch (IOException | Refused e) {
             return Optional.empty();
         }
@@ -117,7 +121,7 @@ public final class JsonReader {
 
     private static Read read(String text, JsonFactory factory, boolean placing) {
         try (JsonParser parser = factory.createParser(text)) {
-            JsonReader reader = new JsonReader(parser, placing, NONE);
+            JsonReader reader = new JsonReader(parser, placing, false, NONE);
             return new Read(reader, read(reader));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
@@ -174,20 +178,20 @@ public final class JsonReader {
     }
 
     private Branch passedOver(JsonToken token) throws IOException {
-        if (!new PassedOver(parser).isStrict(token)) {
+        if (!new PassedOver(parser, sure).isStrict(token)) {
             throw refused("syntax", "");
         }
         return Branch.EMPTY;
     }
 
     private Branch branch(Pointer here) throws IOException {
-        Map<String, Node> members = new LinkedHashMap<>();
+        Members.Gathering members = new Members.Gathering();
         while (parser.nextToken() != JsonToken.END_OBJECT) {
             String key = wellFormed(parser.currentName());
-            if (members.containsKey(key)) {
+            if (!members.key(key)) {
                 throw refused("key-twice", key);
             }
-            members.put(key, value(parser.nextToken(), placing ? here.child(key) : here));
+            members.value(value(parser.nextToken(), placing ? here.child(key) : here));
         }
         return new Branch(members);
     }
@@ -210,7 +214,7 @@ public final class JsonReader {
     }
 
     private String wellFormed(String text) {
-        if (!WellFormed.is(text)) {
+        if (!sure && !WellFormed.is(text)) {
             throw refused("surrogate", "");
         }
         return text;

@@ -1,6 +1,7 @@
 package bedmark.json;
 
 import bedmark.document.Branch;
+import bedmark.document.Members;
 import bedmark.document.Node;
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
@@ -11,7 +12,6 @@ import com.fasterxml.jackson.core.util.Separators;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
-import java.util.Arrays;
 
 /** Writes documents: the same tree always gives the same bytes, on every machine. */
 public final class JsonWriter {
@@ -65,13 +65,10 @@ public final class JsonWriter {
     private static void put(JsonGenerator generator, Node node, boolean sorted) throws IOException {
         if (node instanceof Branch branch) {
             generator.writeStartObject();
-            String[] keys = branch.members().keySet().toArray(String[]::new);
-            if (sorted) {
-                Arrays.sort(keys);
-            }
-            for (String key : keys) {
-                generator.writeFieldName(key);
-                put(generator, branch.members().get(key), sorted);
+            Members members = sorted ? branch.members().sorted() : branch.members();
+            for (int i = 0; i < members.size(); i++) {
+                generator.writeFieldName(members.key(i));
+                put(generator, members.value(i), sorted);
             }
             generator.writeEndObject();
         } else if (node instanceof Node.Series series) {

@@ -1,6 +1,7 @@
 package bedmark.json;
 
 import bedmark.document.Branch;
+import bedmark.document.Members;
 import bedmark.document.Node;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.math.BigDecimal;
@@ -152,10 +153,11 @@ interface QuickRule {
         return value -> {
             Answer answer = Answer.YES;
             if (value instanceof Branch branch) {
-                for (Map.Entry<String, Node> member : branch.members().entrySet()) {
-                    QuickRule rule = byKey.get(member.getKey());
-                    if (rule != null && !(member.getValue() instanceof Node.Blank)) {
-                        answer = answer.and(rule.of(member.getValue()));
+                Members members = branch.members();
+                for (int i = 0; i < members.size(); i++) {
+                    QuickRule rule = byKey.get(members.key(i));
+                    if (rule != null && !(members.value(i) instanceof Node.Blank)) {
+                        answer = answer.and(rule.of(members.value(i)));
                     }
                 }
             }

@@ -7,6 +7,16 @@ final class WellFormed {
     private WellFormed() {
     }
 
+    /** Whether every text that valid UTF-8 holds is sure to be one: nothing in it is written as the code of a character. */
+    static boolean isSure(byte[] utf8) {
+        for (int i = 1; i < utf8.length; i++) {
+            if (utf8[i] == 'u' && utf8[i - 1] == '\\') {
+                return false;
+            }
+        }
+        return true;
+    }
+
     static boolean is(String text) {
         for (int i = 0; i < text.length(); i++) {
             if (Character.isSurrogate(text.charAt(i))) {

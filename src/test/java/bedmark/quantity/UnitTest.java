@@ -37,7 +37,7 @@ class UnitTest {
         }
     }
 
-    /** Multiplied or divided, a number comes to the same bits as by the fraction of whole numbers that the factor is. */
+    /** Multiplied or divided, a number comes to the same bits as by the fraction that the factor is. */
     @ParameterizedTest
     @CsvSource({
         "cm, 1, 100", "mm, 1, 1000", "[in_i], 254, 10000", "[ft_i]/min, 3048, 600000", "kW, 1000, 1",

@@ -68,11 +68,19 @@ final class Texture {
 
     private static boolean clear(List<Point> region, Point dot, double radius) {
         for (int i = 0; i < region.size(); i++) {
-            if (fromEdge(region.get(i), region.get((i + 1) % region.size()), dot) < radius) {
+            Point a = region.get(i);
+            Point b = region.get((i + 1) % region.size());
+            if (canReach(a, b, dot, radius) && fromEdge(a, b, dot) < radius) {
                 return false;
             }
         }
         return true;
+    }
+
+    /** Whether an edge may come that close: most lie far off, and how far need not be known while a finger pulls. */
+    private static boolean canReach(Point a, Point b, Point point, double radius) {
+        return Math.min(a.x(), b.x()) - radius <= point.x() && point.x() <= Math.max(a.x(), b.x()) + radius
+                && Math.min(a.y(), b.y()) - radius <= point.y() && point.y() <= Math.max(a.y(), b.y()) + radius;
     }
 
     private static double fromEdge(Point a, Point b, Point point) {

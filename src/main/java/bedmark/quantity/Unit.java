@@ -50,12 +50,23 @@ public enum Unit {
     private final Dimension dimension;
     private final BigDecimal numerator;
     private final BigDecimal denominator;
+    /** The factor to SI where it is a decimal: to multiply is a small part of the work that a division is. */
+    private final Optional<BigDecimal> factor;
 
     Unit(String code, Dimension dimension, String numerator, String denominator) {
         this.code = code;
         this.dimension = dimension;
         this.numerator = new BigDecimal(numerator);
         this.denominator = new BigDecimal(denominator);
+        this.factor = decimal(this.numerator, this.denominator);
+    }
+
+    private static Optional<BigDecimal> decimal(BigDecimal numerator, BigDecimal denominator) {
+        try {
+            return Optional.of(numerator.divide(denominator));
+        } catch (ArithmeticException e) {
+            return Optional.empty();
+        }
     }
 
     /** The unit with that UCUM code, or nothing where Bedmark does not use it. */
@@ -87,7 +98,12 @@ public enum Unit {
 
     /** A number of this unit in the SI unit of its dimension, correctly rounded once. */
     public double toSi(BigDecimal number) {
-        return number.multiply(numerator).divide(denominator, MathContext.DECIMAL128).doubleValue();
+        return (factor.isPresent() ? number.multiply(factor.get(), MathContext.DECIMAL128) : divided(number))
+                .doubleValue();
+    }
+
+    private BigDecimal divided(BigDecimal number) {
+        return number.multiply(numerator).divide(denominator, MathContext.DECIMAL128);
     }
 
     /** An SI number in this unit (for display: to the precision of a double). */

@@ -4,7 +4,6 @@ import static bedmark.document.Refused.below;
 
 import bedmark.document.Branch;
 import bedmark.document.Defect;
-import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
 import bedmark.engine.Datum;
@@ -39,11 +38,31 @@ final class ZoneMapping {
     private static final String DEPTH_METHOD = "depthMethod";
 
     /** Where each datum stands, read once: a key on the screen maps a zone. */
-    private static final Map<Datum, Pointer> PLACES = places();
+    private static final Map<Datum, Place> PLACES = places();
 
     private final Map<String, Branch> sources;
     private final Taking taking;
     private final List<String> unfinished = new ArrayList<>();
+
+    /**
+     * Where a datum stands.
+     *
+     * @param source the document that it stands in
+     * @param holder the object in it that holds the datum
+     * @param base   that object's place as refusals name it
+     */
+    private record Place(Pointer whole, String source, Pointer holder, Pointer base) {
+        static Place of(Pointer whole) {
+            List<String> tokens = whole.tokens();
+            int last = tokens.size() - 1;
+            return new Place(whole, tokens.get(0), new Pointer(tokens.subList(1, last)),
+                    new Pointer(tokens.subList(0, last)));
+        }
+
+        String key() {
+            return whole.last();
+        }
+    }
 
     private ZoneMapping(Map<String, Branch> sources, Instruments instruments) {
         this.sources = sources;
@@ -107,10 +126,10 @@ final class ZoneMapping {
         };
     }
 
-    private static Map<Datum, Pointer> places() {
-        Map<Datum, Pointer> places = new EnumMap<>(Datum.class);
+    private static Map<Datum, Place> places() {
+        Map<Datum, Place> places = new EnumMap<>(Datum.class);
         for (Datum datum : Datum.values()) {
-            places.put(datum, Pointer.parse(datum.pointer()));
+            places.put(datum, Place.of(Pointer.parse(datum.pointer())));
         }
         return places;
     }
@@ -151,23 +170,22 @@ final class ZoneMapping {
 
     /** What the documents of the survey hold; what was fitted from the site's drives stands elsewhere. */
     private Optional<Reading> number(Datum datum) {
-        Pointer place = PLACES.get(datum);
-        Branch source = sources.getOrDefault(place.tokens().get(0), Branch.EMPTY);
-        Pointer inside = new Pointer(place.tokens().subList(1, place.tokens().size()));
-        Optional<Node> node = source.at(inside).filter(found -> !(found instanceof Node.Blank));
-        if (node.isEmpty()) {
+        Place place = PLACES.get(datum);
+        Optional<Branch> found = sources.getOrDefault(place.source(), Branch.EMPTY).at(place.holder())
+                .filter(Branch.class::isInstance).map(Branch.class::cast).filter(holder -> holder.has(place.key()));
+        if (found.isEmpty()) {
             return Optional.empty();
         }
-        Branch holder = Branch.EMPTY.with(place.last(), node.get());
-        Pointer base = new Pointer(place.tokens().subList(0, place.tokens().size() - 1));
+        Branch holder = found.get();
         if (datum == Datum.SKIRT_POWER_BUDGET) {
-            return below(base, () -> holder.quantity(place.last())).flatMap(budget -> budget(budget, place));
+            return below(place.base(), () -> holder.quantity(place.key()))
+                    .flatMap(budget -> budget(budget, place.whole()));
         }
-        return below(base, () -> dimension(datum)
-                .map(dimension -> holder.quantity(place.last())
-                        .map(quantity -> reading(place, quantity, dimension, datum.instrument())))
-                .orElseGet(() -> holder.number(place.last())
-                        .map(value -> taking.plain(place.toString(), value.doubleValue(), datum.instrument()))));
+        return below(place.base(), () -> dimension(datum)
+                .map(dimension -> holder.quantity(place.key())
+                        .map(quantity -> reading(place.whole(), quantity, dimension, datum.instrument())))
+                .orElseGet(() -> holder.number(place.key())
+                        .map(value -> taking.plain(datum.pointer(), value.doubleValue(), datum.instrument()))));
     }
 
     /** A budget is a share of the rated power, or a power; one without a rated power waits for it. */

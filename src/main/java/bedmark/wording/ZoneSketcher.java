@@ -71,8 +71,13 @@ public final class ZoneSketcher {
         try {
             return assessor.zone(new Survey(document));
         } catch (Refused e) {
-            return assessor.zone(new Survey(document.with("readings", Branch.EMPTY)));
+            return registered(document);
         }
+    }
+
+    /** What the register knows of a survey's zone: what the picture shows while a reading cannot be. */
+    public LoadingZone registered(Branch document) {
+        return assessor.zone(new Survey(document.with("readings", Branch.EMPTY)));
     }
 
     private static OptionalDouble number(LoadingZone zone, Datum... firstOf) {

@@ -41,6 +41,33 @@ class TextureTest {
     }
 
     @Test
+    void noDotIsLeftOutThatKeepsOffEveryEdge() {
+        List<Point> dots = Texture.grain(NOTCHED, 4, 0.5);
+        for (int row = 1; row < 20; row++) {
+            for (int column = 0; column < 25; column++) {
+                Point dot = new Point(column * 4 + (row % 2 == 0 ? 0 : 2), row * 3);
+                boolean clear = Texture.holds(NOTCHED, dot) && fromEdges(dot) >= 1;
+                assertEquals(clear, dots.contains(dot), () -> "dot at " + dot);
+            }
+        }
+    }
+
+    /** How far a point lies from the nearest of many points along the edges. */
+    private static double fromEdges(Point point) {
+        double least = Double.MAX_VALUE;
+        for (int i = 0; i < NOTCHED.size(); i++) {
+            Point a = NOTCHED.get(i);
+            Point b = NOTCHED.get((i + 1) % NOTCHED.size());
+            for (int step = 0; step <= 5000; step++) {
+                double share = step / 5000.0;
+                least = Math.min(least, Math.hypot(a.x() + share * (b.x() - a.x()) - point.x(),
+                        a.y() + share * (b.y() - a.y()) - point.y()));
+            }
+        }
+        return least;
+    }
+
+    @Test
     void textureStaysWhenTheRegionGrows() {
         List<Point> small = new Box(0, 30, 100, 30).corners();
         List<Point> large = new Box(0, 0, 100, 60).corners();

@@ -4,6 +4,8 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
 import java.math.BigDecimal;
+import java.math.BigInteger;
+import java.math.MathContext;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -32,6 +34,23 @@ class UnitTest {
             BigDecimal number = BigDecimal.valueOf(random.nextInt(1_000_000) + 1, random.nextInt(6));
             double back = unit.fromSi(unit.toSi(number));
             assertEquals(number.doubleValue(), back, Math.abs(number.doubleValue()) * 1e-15 * 4);
+        }
+    }
+
+    /** Multiplied or divided, a number comes to the same bits as by the fraction that the factor is. */
+    @ParameterizedTest
+    @CsvSource({
+        "cm, 1, 100", "mm, 1, 1000", "[in_i], 254, 10000", "[ft_i]/min, 3048, 600000", "kW, 1000, 1",
+        "t/h, 1000, 3600", "[lbf_av]/[ft_i], 44482216152605, 3048000000000", "1/min, 1, 60"
+    })
+    void aNumberIsRoundedAsItsFractionIs(String code, long numerator, long denominator) {
+        Unit unit = Unit.ofCode(code).orElseThrow();
+        Random random = new Random(20261202);
+        for (int i = 0; i < 2000; i++) {
+            BigDecimal number = new BigDecimal(new BigInteger(random.nextInt(110) + 1, random), random.nextInt(12));
+            BigDecimal fraction = number.multiply(BigDecimal.valueOf(numerator))
+                    .divide(BigDecimal.valueOf(denominator), MathContext.DECIMAL128);
+            assertEquals(Double.parseDouble(fraction.toString()), unit.toSi(number), 0.0);
         }
     }
 

@@ -120,7 +120,8 @@ final class CarriedOver {
 
     /** Whether the answer of a cell was taken over and not read since. */
     static boolean holds(Branch document, Pointer where) {
-        return mark(where).filter(marks(document)::contains).isPresent() && document.at(where).isPresent();
+        return document.has(MARKS.last()) && mark(where).filter(marks(document)::contains).isPresent()
+                && document.at(where).isPresent();
     }
 
     private static Optional<String> mark(Pointer where) {

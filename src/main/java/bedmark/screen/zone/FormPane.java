@@ -203,7 +203,8 @@ final class FormPane extends VBox {
             row.update();
             say(row);
             header.titleProperty().set(title(row.row().section()));
-            header.asideProperty().set(wording.text("screen.zone.place", index + 1, rows.size()));
+            header.asideProperty().set(wording.text("screen.zone.place", Integer.toString(index + 1),
+                    Integer.toString(rows.size())));
             row.built().focusActive();
             reveal();
         });

@@ -18,13 +18,18 @@ public record Outcome(Optional<Assessment> assessment, Optional<Refused> impossi
 
     /** @param companions the other surveys of the conveyor's round, as the engine sees them */
     static Outcome of(Branch document, Assessor assessor, List<Assessor.Seen> companions) {
+        Survey judged = new Survey(document);
+        LoadingZone zone;
         try {
-            Survey judged = new Survey(document);
-            LoadingZone zone = assessor.zone(judged);
+            zone = assessor.zone(judged);
+        } catch (Refused e) {
+            return new Outcome(Optional.empty(), Optional.of(e), Optional.empty());
+        }
+        try {
             return new Outcome(Optional.of(assessor.assess(new Assessor.Seen(judged, zone), companions)),
                     Optional.empty(), Optional.of(zone));
         } catch (Refused e) {
-            return new Outcome(Optional.empty(), Optional.of(e), Optional.empty());
+            return new Outcome(Optional.empty(), Optional.of(e), Optional.of(zone));
         }
     }
 }

@@ -3,6 +3,7 @@ package bedmark.screen.zone;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.engine.Assessment;
+import bedmark.engine.LoadingZone;
 import bedmark.engine.Result;
 import bedmark.picture.Snap;
 import bedmark.picture.ZoneSketch;
@@ -62,9 +63,8 @@ final class PicturePane extends StackPane {
     private ZoneSketch sketch() {
         Branch document = model.surveyProperty().get();
         Optional<Integer> line = BedLines.lineOf(model.active());
-        ZoneSketch sketch = model.outcomeProperty().get().zone()
-                .map(zone -> sketcher.sketch(document, zone, found(), line))
-                .orElseGet(() -> sketcher.sketch(document, found(), line));
+        LoadingZone zone = model.outcomeProperty().get().zone().orElseGet(() -> sketcher.registered(document));
+        ZoneSketch sketch = sketcher.sketch(document, zone, found(), line);
         return asked.map(speed -> speed.over(sketch, document)).orElse(sketch);
     }
 

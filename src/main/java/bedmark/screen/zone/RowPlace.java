@@ -15,6 +15,7 @@ final class RowPlace extends StackPane {
     private Optional<RowView> view = Optional.empty();
     private boolean upright;
     private final Map<Double, Double> heights = new HashMap<>();
+    private final Map<Double, Double> leastHeights = new HashMap<>();
 
     /** @param quiet whether what is to be said of the row is said elsewhere */
     RowPlace(SlotRow row, ZoneModel model, Wording wording, boolean quiet) {
@@ -57,6 +58,7 @@ final class RowPlace extends StackPane {
     @Override
     public void requestLayout() {
         heights.clear();
+        leastHeights.clear();
         super.requestLayout();
     }
 
@@ -67,6 +69,17 @@ final class RowPlace extends StackPane {
         if (known == null) {
             known = super.computePrefHeight(width);
             heights.put(width, known);
+        }
+        return known;
+    }
+
+    /** Asked for together with the height that the row would like. */
+    @Override
+    protected double computeMinHeight(double width) {
+        Double known = leastHeights.get(width);
+        if (known == null) {
+            known = super.computeMinHeight(width);
+            leastHeights.put(width, known);
         }
         return known;
     }

@@ -14,6 +14,7 @@ import bedmark.screen.part.QualityButton;
 import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -36,6 +37,20 @@ final class RowView extends VBox {
     private Optional<QualityButton> quality = Optional.empty();
     private Optional<ActionButton> carry = Optional.empty();
     private Optional<LineButtons> lineButtons = Optional.empty();
+    private final Map<Pointer, Face> faces = new HashMap<>();
+    private Said said = new Said("", Judgement.NONE);
+
+    /**
+     * All that the words in a box are made of, besides what stays as long as the row does: while it is the same, so
+     * are they. Whatever a key saves asks each row of the form to show itself anew.
+     *
+     * @param typed what is being typed into the box; nothing where the pad types elsewhere
+     * @param hand  the unit that is typed in; nothing where the pad types elsewhere
+     * @param usual the unit that stands in an empty box; nothing where it takes no number with a unit
+     */
+    private record Face(Optional<Node> answer, boolean active, String typed, Optional<Unit> hand,
+                        Optional<Unit> usual) {
+    }
 
     /** @param quiet whether what is to be said is said elsewhere, since large keys take the room */
     RowView(SlotRow row, ZoneModel model, Wording wording, boolean quiet) {
@@ -161,7 +176,7 @@ final class RowView extends VBox {
         for (Slot slot : row.slots()) {
             update(slot, boxes.get(slot.where()));
         }
-        Said said = said();
+        said = saying();
         message.setText(quiet ? "" : said.words());
         said.judgement().dress(message);
         carry.ifPresent(button -> {
@@ -175,8 +190,13 @@ final class RowView extends VBox {
     record Said(String words, Judgement judgement) {
     }
 
-    /** What is to be said of the row: what is wrong or doubtful, else that it was taken over, else how it is read. */
+    /** What was to be said of the row when it was last shown anew. */
     Said said() {
+        return said;
+    }
+
+    /** What is to be said of the row: what is wrong or doubtful, else that it was taken over, else how it is read. */
+    private Said saying() {
         Optional<Note> note = holdsActive() ? model.noteProperty().get()
                 : row.slots().stream().flatMap(slot -> model.impossible(slot).stream()).findFirst();
         if (note.isPresent()) {
@@ -191,40 +211,52 @@ final class RowView extends VBox {
     }
 
     private void update(Slot slot, FieldBox box) {
-        boolean active = slot.equals(model.active());
-        box.activeProperty().set(active);
-        String typed = model.typedProperty().get();
-        Unit unit = unit(slot);
-        if (active && !typed.isEmpty()) {
-            box.valueProperty().set(slot instanceof Slot.TextSlot ? typed : PadText.shown(typed));
-            box.unitProperty().set(unit == null ? "" : wording.symbol(unit));
-        } else {
-            Optional<Node> answer = model.answer(slot);
-            SlotWords.Shown shown = active ? words.shownIn(slot, answer, Optional.ofNullable(unit))
-                    : words.shown(slot, answer);
-            box.valueProperty().set(slot instanceof Slot.MeasureSlot ? PadText.shown(shown.value()) : shown.value());
-            box.unitProperty().set(shown.unit().isEmpty() && unit != null ? wording.symbol(unit) : shown.unit());
+        Face face = face(slot);
+        if (!face.equals(faces.put(slot.where(), face))) {
+            show(slot, box, face);
         }
-        box.freshProperty().set(active && typed.isEmpty() && !box.valueProperty().get().isEmpty());
-        box.ghostProperty().set(row.slots().size() == 1 || slot.where().last().equals("depth")
-                ? words.ghost(slot, model.lastAnswer(slot), unit) : "");
-        box.judgementProperty().set(judged(slot, active));
+        box.judgementProperty().set(judged(slot, face.active()));
         box.carriedProperty().set(model.carriedOver(slot));
         quality.filter(button -> slot instanceof Slot.MeasureSlot measured && measured.markable()).ifPresent(button -> {
-            Optional<Quality> mark = model.answer(slot).flatMap(SlotWords::quantity).flatMap(Quantity::quality);
+            // A press turns the button before it is known whether the reading can be marked so.
+            Optional<Quality> mark = face.answer().flatMap(SlotWords::quality);
             button.setVisible(mark.isPresent());
             button.setManaged(mark.isPresent());
             mark.ifPresent(button.qualityProperty()::set);
         });
     }
 
-    private Unit unit(Slot slot) {
-        if (!(slot instanceof Slot.MeasureSlot measured)) {
+    private Face face(Slot slot) {
+        boolean active = slot.equals(model.active());
+        return new Face(model.answer(slot), active, active ? model.typedProperty().get() : "",
+                active ? model.inHandProperty().get().unit() : Optional.empty(),
+                slot instanceof Slot.MeasureSlot measured ? Optional.of(model.offered(measured.measure()))
+                        : Optional.empty());
+    }
+
+    private void show(Slot slot, FieldBox box, Face face) {
+        box.activeProperty().set(face.active());
+        Unit unit = unit(slot, face);
+        if (!face.typed().isEmpty()) {
+            box.valueProperty().set(slot instanceof Slot.TextSlot ? face.typed() : PadText.shown(face.typed()));
+            box.unitProperty().set(unit == null ? "" : wording.symbol(unit));
+        } else {
+            SlotWords.Shown shown = face.active() ? words.shownIn(slot, face.answer(), Optional.ofNullable(unit))
+                    : words.shown(slot, face.answer());
+            box.valueProperty().set(slot instanceof Slot.MeasureSlot ? PadText.shown(shown.value()) : shown.value());
+            box.unitProperty().set(shown.unit().isEmpty() && unit != null ? wording.symbol(unit) : shown.unit());
+        }
+        box.freshProperty().set(face.active() && face.typed().isEmpty() && !box.valueProperty().get().isEmpty());
+        box.ghostProperty().set(row.slots().size() == 1 || slot.where().last().equals("depth")
+                ? words.ghost(slot, model.lastAnswer(slot), unit) : "");
+    }
+
+    private static Unit unit(Slot slot, Face face) {
+        if (!(slot instanceof Slot.MeasureSlot)) {
             return null;
         }
-        return slot.equals(model.active()) ? model.inHandProperty().get().unit().orElseThrow()
-                : model.answer(slot).flatMap(SlotWords::quantity).map(Quantity::unit)
-                        .orElse(model.offered(measured.measure()));
+        return face.active() ? face.hand().orElseThrow()
+                : face.answer().flatMap(SlotWords::quantity).map(Quantity::unit).or(face::usual).orElseThrow();
     }
 
     private Judgement judged(Slot slot, boolean active) {

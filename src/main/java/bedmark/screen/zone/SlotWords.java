@@ -6,6 +6,7 @@ import bedmark.document.Refused;
 import bedmark.form.Choice;
 import bedmark.form.StationsField;
 import bedmark.form.TextField;
+import bedmark.quantity.Quality;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.Unit;
@@ -101,6 +102,12 @@ final class SlotWords {
         } catch (Refused e) {
             return Optional.empty();
         }
+    }
+
+    /** The mark of a reading, where it has one. */
+    static Optional<Quality> quality(Node node) {
+        return node instanceof Branch branch && branch.has("quality") ? quantity(node).flatMap(Quantity::quality)
+                : Optional.empty();
     }
 
     /** A quantity in its own unit with the symbol. */

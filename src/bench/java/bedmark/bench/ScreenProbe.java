@@ -208,9 +208,11 @@ public final class ScreenProbe {
 
     }
 
-    /** Types into the depths, and changes a label in a bare window, in turn. */
+    /** Types depths and places of stations, other ones each time, and changes a label in a bare window, in turn. */
     private static final class Typist {
-        private static final String TYPED = "262\r";
+        /** Keys from one return to the first depth to the next. */
+        private static final int TABLE = 16;
+        private static final String TYPED = "162\r0.5\r165\r1.5\r" + "172\r0.6\r175\r1.6\r";
         private static final double FRAME = 1000 / 60.0;
 
         private final Scene scene;
@@ -262,7 +264,7 @@ public final class ScreenProbe {
 
         private void key(int at) {
             char sign = TYPED.charAt(Math.floorMod(at, TYPED.length()));
-            if (Math.floorMod(at, 16) == 0) {
+            if (Math.floorMod(at, TABLE) == 0) {
                 Optional.ofNullable(scene.lookup(DEPTH)).ifPresent(Node::requestFocus);
             }
             Node target = scene.getFocusOwner();

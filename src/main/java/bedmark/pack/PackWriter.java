@@ -84,7 +84,7 @@ public final class PackWriter {
         texts.forEach((name, bytes) -> zip.add(name, bytes.length, crc(bytes)));
         found.forEach((name, photo) -> zip.add(name, photo.claim().bytes(), photo.crc()));
         checkPlan(zip);
-        return save(target, zip, texts, found, key, work);
+        return save(out, zip, texts, found, key, work);
     }
 
     private static void checkTarget(Path target) {
@@ -128,24 +128,25 @@ public final class PackWriter {
         ZipSizes.check(zip.slots(), zip.size(), LIMITS);
     }
 
-    private WrittenPack save(Path target, StoredZip zip, Map<String, byte[]> texts, Map<String, SourcePhoto> photos,
+    private WrittenPack save(Path out, StoredZip zip, Map<String, byte[]> texts, Map<String, SourcePhoto> photos,
                              DeviceKey key, Work work) {
+        Path target = out.toAbsolutePath();
         MessageDigest digest = Sha256.begin();
-        StoredZip.Content content = (slot, out) -> {
+        StoredZip.Content content = (slot, into) -> {
             work.add(0);
             if (photos.containsKey(slot.name())) {
-                photos.get(slot.name()).copy(out, work);
+                photos.get(slot.name()).copy(into, work);
             } else {
-                out.write(texts.get(slot.name()));
+                into.write(texts.get(slot.name()));
             }
         };
         try {
             checkRoom(target.getParent(), zip.size());
-            new SafeFile(disk, target, false).write(out -> zip.write(new DigestOutputStream(out, digest), content));
+            new SafeFile(disk, target, false).write(into -> zip.write(new DigestOutputStream(into, digest), content));
         } catch (IOException | ReadOnlyFileSystemException e) {
             throw WriteFailure.of(e, target.getParent(), disk);
         }
-        return new WrittenPack(target, HexFormat.of().formatHex(digest.digest()), zip.size(), photos.size(),
+        return new WrittenPack(out, HexFormat.of().formatHex(digest.digest()), zip.size(), photos.size(),
                 key.fingerprint());
     }
 

@@ -1,11 +1,7 @@
 package bedmark.pack;
 
-import bedmark.document.Branch;
-import bedmark.document.Node;
-import bedmark.json.JsonWriter;
+import bedmark.json.Canonical;
 import bedmark.survey.Survey;
-import java.util.Map;
-import java.util.TreeMap;
 
 /** What makes two surveys the same: everything that people entered, wherever the keys stand in the file. */
 public final class SurveyContent {
@@ -20,18 +16,6 @@ public final class SurveyContent {
      * @return 64 lower-case hexadecimal digits
      */
     public static String sha256(Survey survey) {
-        return Sha256.hex(JsonWriter.compact(sorted(survey.document().without("assessment"))));
-    }
-
-    private static Node sorted(Node node) {
-        if (node instanceof Branch branch) {
-            Branch sorted = Branch.EMPTY;
-            for (Map.Entry<String, Node> member : new TreeMap<>(branch.members()).entrySet()) {
-                sorted = sorted.with(member.getKey(), sorted(member.getValue()));
-            }
-            return sorted;
-        }
-        return node instanceof Node.Series series
-                ? new Node.Series(series.items().stream().map(SurveyContent::sorted).toList()) : node;
+        return Sha256.hex(Canonical.bytes(survey.document().without("assessment")));
     }
 }

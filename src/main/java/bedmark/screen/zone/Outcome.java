@@ -18,18 +18,18 @@ public record Outcome(Optional<Assessment> assessment, Optional<Refused> impossi
 
     /** @param companions the other surveys of the conveyor's round, as the engine sees them */
     static Outcome of(Branch document, Assessor assessor, List<Assessor.Seen> companions) {
-        Survey judged = new Survey(document);
-        LoadingZone zone;
+        Assessor.Seen seen;
         try {
-            zone = assessor.zone(judged);
+            Survey judged = new Survey(document);
+            seen = new Assessor.Seen(judged, assessor.zone(judged));
         } catch (Refused e) {
             return new Outcome(Optional.empty(), Optional.of(e), Optional.empty());
         }
         try {
-            return new Outcome(Optional.of(assessor.assess(new Assessor.Seen(judged, zone), companions)),
-                    Optional.empty(), Optional.of(zone));
+            return new Outcome(Optional.of(assessor.assess(seen, companions)), Optional.empty(),
+                    Optional.of(seen.zone()));
         } catch (Refused e) {
-            return new Outcome(Optional.empty(), Optional.of(e), Optional.of(zone));
+            return new Outcome(Optional.empty(), Optional.of(e), Optional.of(seen.zone()));
         }
     }
 }

@@ -4,6 +4,7 @@ import bedmark.wording.Wording;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.DoubleUnaryOperator;
 import javafx.scene.layout.StackPane;
 
 /** The place of a row in the form: as high as a row, and empty until the row is built. */
@@ -62,24 +63,22 @@ final class RowPlace extends StackPane {
         super.requestLayout();
     }
 
-    /** A key changes one row; the list asks all of them how high they are, at its own width and at any. */
     @Override
     protected double computePrefHeight(double width) {
-        Double known = heights.get(width);
-        if (known == null) {
-            known = super.computePrefHeight(width);
-            heights.put(width, known);
-        }
-        return known;
+        return known(heights, width, super::computePrefHeight);
     }
 
-    /** Asked for together with the height that the row would like. */
     @Override
     protected double computeMinHeight(double width) {
-        Double known = leastHeights.get(width);
+        return known(leastHeights, width, super::computeMinHeight);
+    }
+
+    /** A key changes one row; the list asks all of them how high they are, at its own width and at any. */
+    private static double known(Map<Double, Double> heights, double width, DoubleUnaryOperator height) {
+        Double known = heights.get(width);
         if (known == null) {
-            known = super.computeMinHeight(width);
-            leastHeights.put(width, known);
+            known = height.applyAsDouble(width);
+            heights.put(width, known);
         }
         return known;
     }

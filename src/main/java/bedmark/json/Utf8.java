@@ -15,7 +15,7 @@ final class Utf8 {
 
     /** Whether the bytes are UTF-8 from their first to their last. */
     static boolean holds(byte[] bytes) {
-        if (isAscii(bytes)) {
+        if (JsonScan.isAscii(bytes)) {
             return true;
         }
         CharsetDecoder decoder = StandardCharsets.UTF_8.newDecoder();
@@ -27,13 +27,5 @@ final class Utf8 {
             result = decoder.decode(rest, piece, true);
         }
         return result.isUnderflow();
-    }
-
-    private static boolean isAscii(byte[] bytes) {
-        int all = 0;
-        for (byte one : bytes) {
-            all |= one;
-        }
-        return all >= 0;
     }
 }

@@ -9,8 +9,8 @@ final class WellFormed {
 
     /** Whether every text that valid UTF-8 holds is sure to be one: nothing in it is written as the code of a character. */
     static boolean isSure(byte[] utf8) {
-        for (int i = 1; i < utf8.length; i++) {
-            if (utf8[i] == 'u' && utf8[i - 1] == '\\') {
+        for (int at = JsonScan.find(utf8, '\\', 0); at >= 0; at = JsonScan.find(utf8, '\\', at + 1)) {
+            if (at + 1 < utf8.length && utf8[at + 1] == 'u') {
                 return false;
             }
         }

@@ -26,6 +26,11 @@ public sealed interface Field permits TextField, NumberField, QuantityField, Cho
         return List.of(where());
     }
 
+    /** All places of a survey that {@link #judge} looks at: while nothing changes there, its judgement stays. */
+    default List<Pointer> judgedBy() {
+        return places();
+    }
+
     /** What the survey holds; an empty text, list or object is no answer. */
     default Optional<Node> answer(Branch survey) {
         return saying(survey.at(where()));

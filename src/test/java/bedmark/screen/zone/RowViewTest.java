@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
 import bedmark.document.Node;
+import bedmark.document.Pointer;
 import bedmark.form.Choice;
 import bedmark.form.FieldForm;
 import bedmark.index.Store;
@@ -15,10 +16,12 @@ import bedmark.json.FormReader;
 import bedmark.json.JsonReader;
 import bedmark.quantity.BeltState;
 import bedmark.quantity.Quality;
+import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
 import bedmark.screen.Glass;
 import bedmark.screen.Scribe;
 import bedmark.screen.part.FieldBox;
+import bedmark.screen.part.Judgement;
 import bedmark.screen.part.QualityButton;
 import bedmark.survey.Act;
 import bedmark.survey.Assessor;
@@ -106,10 +109,7 @@ class RowViewTest {
             model.activate(BedLines.depth(0));
             model.typedProperty().set("262");
             model.next();
-            SlotRow row = model.rowsProperty().get().stream()
-                    .filter(each -> each.slots().stream().anyMatch(slot -> slot.where().equals(BedLines.depth(0))))
-                    .findFirst().orElseThrow();
-            RowView shown = build(row);
+            RowView shown = build(row(BedLines.depth(0)));
             QualityButton button = (QualityButton) shown.lookup(".quality");
             assertEquals(Quality.ESTIMATED, button.qualityProperty().get());
             button.qualityProperty().set(Quality.MEASURED);
@@ -118,6 +118,41 @@ class RowViewTest {
             assertEquals(Quality.ESTIMATED, button.qualityProperty().get(), "the belt is not isolated");
             return null;
         });
+    }
+
+    @Test
+    void stationIsJudgedAnewWhenTheZoneTurnsOutShorter() throws Exception {
+        Glass.on(() -> {
+            enter(Survey.READINGS.child("loadingZoneLength"), "4");
+            enter(BedLines.position(0), "3");
+            RowView shown = build(row(BedLines.position(0)));
+            assertEquals(List.of(Judgement.NONE, Judgement.NONE), judgements(shown));
+            enter(Survey.READINGS.child("loadingZoneLength"), "2");
+            model.activateFirst();
+            shown.update();
+            assertEquals(List.of(Judgement.WRONG, Judgement.NONE), judgements(shown), "it stands outside the zone");
+            enter(Survey.READINGS.child("loadingZoneLength"), "5");
+            shown.update();
+            assertEquals(List.of(Judgement.NONE, Judgement.NONE), judgements(shown));
+            return null;
+        });
+    }
+
+    private void enter(Pointer where, String number) {
+        model.activate(where);
+        model.chooseUnit(Unit.METRE);
+        model.typedProperty().set(number);
+        model.keep();
+    }
+
+    private SlotRow row(Pointer where) {
+        return model.rowsProperty().get().stream()
+                .filter(row -> row.slots().stream().anyMatch(slot -> slot.where().equals(where))).findFirst()
+                .orElseThrow();
+    }
+
+    private static List<Judgement> judgements(RowView row) {
+        return row.lookupAll(".field-box").stream().map(box -> ((FieldBox) box).judgementProperty().get()).toList();
     }
 
     private RowView build(SlotRow row) {

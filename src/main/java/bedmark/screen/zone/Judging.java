@@ -30,15 +30,8 @@ final class Judging {
     /** What was found last: each cell of a table asks for its whole field, and a key changes few answers. */
     private final Map<Field, Found> found = new IdentityHashMap<>();
 
-    /**
-     * What was found of a field.
-     *
-     * @param document that was judged
-     * @param places   the places that the judgement looks at
-     * @param answers  what was there
-     */
-    private record Found(Branch document, List<Pointer> places, List<Optional<Node>> answers,
-                         List<Judgement> judgements) {
+    /** What was found of a field in a document. */
+    private record Found(Branch document, List<Judgement> judgements) {
     }
 
     /** What keeps a survey from being completed, and the place to mend it at. */
@@ -83,11 +76,9 @@ final class Judging {
         if (before != null && before.document == document) {
             return before.judgements;
         }
-        List<Pointer> places = before == null ? field.judgedBy() : before.places;
-        List<Optional<Node>> answers = places.stream().map(document::at).toList();
-        List<Judgement> judgements = before != null && before.answers.equals(answers) ? before.judgements
-                : judge(document, field);
-        found.put(field, new Found(document, places, answers, judgements));
+        List<Judgement> judgements = before != null && field.judgesAlike(before.document, document)
+                ? before.judgements : judge(document, field);
+        found.put(field, new Found(document, judgements));
         return judgements;
     }
 

@@ -12,12 +12,9 @@ import bedmark.screen.part.Judgement;
 import bedmark.screen.part.QualityButton;
 import bedmark.survey.Survey;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import javafx.scene.Parent;
-import javafx.scene.control.Labeled;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -53,7 +50,7 @@ class RowViewTest {
                 for (SlotRow row : model.rowsProperty().get()) {
                     RowView shown = rows.computeIfAbsent(row, this::build);
                     shown.update();
-                    assertEquals(seen(build(row)), seen(shown), "row " + row.place() + " after act " + i);
+                    assertEquals(RowSeen.in(build(row)), RowSeen.in(shown), "row " + row.place() + " after act " + i);
                 }
             }
             return null;
@@ -109,29 +106,5 @@ class RowViewTest {
 
     private RowView build(SlotRow row) {
         return new RowView(row, model, person.wording(), false);
-    }
-
-    /** All that a row shows. */
-    private static List<String> seen(RowView row) {
-        List<String> seen = new ArrayList<>();
-        seen.add(row.said().toString());
-        look(row, seen);
-        return seen;
-    }
-
-    private static void look(javafx.scene.Node node, List<String> seen) {
-        if (!node.isVisible()) {
-            return;
-        }
-        seen.add(node.getClass().getSimpleName() + " " + node.isManaged()
-                + node.getPseudoClassStates().stream().map(Object::toString).sorted().toList()
-                + (node instanceof Labeled labeled ? " " + labeled.getText() : ""));
-        if (node instanceof FieldBox box) {
-            seen.add(box.activeProperty().get() + " " + box.freshProperty().get() + " " + box.carriedProperty().get()
-                    + " " + box.judgementProperty().get());
-        }
-        if (node instanceof Parent parent) {
-            parent.getChildrenUnmodifiable().forEach(child -> look(child, seen));
-        }
     }
 }

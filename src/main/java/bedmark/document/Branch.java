@@ -66,9 +66,9 @@ public record Branch(Members members) implements Node {
         for (String token : place.tokens()) {
             if (here instanceof Branch branch) {
                 here = branch.members.get(token);
-            } else if (here instanceof Series series && token.matches("0|[1-9][0-9]{0,8}")
-                    && Integer.parseInt(token) < series.items().size()) {
-                here = series.items().get(Integer.parseInt(token));
+            } else if (here instanceof Series series) {
+                int index = Pointer.index(token);
+                here = index >= 0 && index < series.items().size() ? series.items().get(index) : null;
             } else {
                 return Optional.empty();
             }

@@ -69,6 +69,22 @@ public record Pointer(List<String> tokens) {
         return tokens.get(tokens.size() - 1);
     }
 
+    /** The index that a token is within a list, as RFC 6901 writes one; -1 where it is none of at most nine digits. */
+    static int index(String token) {
+        if (token.isEmpty() || token.length() > 9 || token.charAt(0) == '0' && token.length() > 1) {
+            return -1;
+        }
+        int index = 0;
+        for (int i = 0; i < token.length(); i++) {
+            char digit = token.charAt(i);
+            if (digit < '0' || digit > '9') {
+                return -1;
+            }
+            index = 10 * index + digit - '0';
+        }
+        return index;
+    }
+
     /** Whether {@code other} is this place or lies below it. */
     public boolean holds(Pointer other) {
         return other.tokens.size() >= tokens.size() && other.tokens.subList(0, tokens.size()).equals(tokens);

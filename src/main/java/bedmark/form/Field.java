@@ -26,6 +26,16 @@ public sealed interface Field permits TextField, NumberField, QuantityField, Cho
         return List.of(where());
     }
 
+    /** All places of a survey that {@link #judge} looks at: while nothing changes there, its judgement stays. */
+    default List<Pointer> judgedBy() {
+        return places();
+    }
+
+    /** Whether both surveys hold the same wherever {@link #judge} looks: then it says the same of both. */
+    default boolean judgesAlike(Branch one, Branch other) {
+        return one == other || judgedBy().stream().allMatch(place -> one.at(place).equals(other.at(place)));
+    }
+
     /** What the survey holds; an empty text, list or object is no answer. */
     default Optional<Node> answer(Branch survey) {
         return saying(survey.at(where()));

@@ -45,6 +45,11 @@ public record SealsField(Head head, List<Choice> sides, List<Choice> types, List
         conditions = List.copyOf(conditions);
     }
 
+    @Override
+    public List<Pointer> judgedBy() {
+        return List.of(where(), ZONE_LENGTH);
+    }
+
     /** Answered with a segment on each side. */
     @Override
     public boolean answered(Branch survey) {

@@ -37,6 +37,11 @@ public record StationsField(Head head, List<Choice> methods, Measure position, M
         return List.of(where(), METHOD);
     }
 
+    @Override
+    public List<Pointer> judgedBy() {
+        return List.of(where(), METHOD, ZONE_LENGTH);
+    }
+
     /** Answered with one whole station. */
     @Override
     public boolean answered(Branch survey) {

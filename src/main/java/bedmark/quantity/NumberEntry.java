@@ -23,6 +23,8 @@ public final class NumberEntry {
     private static final Pattern DECIMAL = Pattern.compile("-?(?:\\d+\\.?\\d*|\\.\\d+)");
     private static final Pattern FRACTION = Pattern.compile("(-?)(?:(\\d+)[ -])?(\\d+)/(\\d+)");
     private static final Pattern UNFINISHED = Pattern.compile("-?\\.?|-?\\d+[ -](?:\\d+/?)?|-?\\d+/");
+    private static final Pattern SPACES = Pattern.compile(" +");
+    private static final Pattern SLASH = Pattern.compile(" ?/ ?");
     private static final Pattern EXPONENT = Pattern.compile("-?[\\d.,]+[eE][-+]?\\d*");
 
     private final boolean comma;
@@ -121,6 +123,6 @@ public final class NumberEntry {
                 });
             }
         }
-        return plain.toString().replaceAll(" +", " ").replaceAll(" ?/ ?", "/").replace(" \"", "\"");
+        return SLASH.matcher(SPACES.matcher(plain).replaceAll(" ")).replaceAll("/").replace(" \"", "\"");
     }
 }

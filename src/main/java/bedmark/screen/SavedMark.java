@@ -2,6 +2,7 @@ package bedmark.screen;
 
 import bedmark.wording.Wording;
 import java.time.format.DateTimeFormatter;
+import java.util.List;
 import java.util.Optional;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.StringBinding;
@@ -9,6 +10,9 @@ import javafx.beans.binding.StringBinding;
 /** Says in the head of each screen whether everything is saved. */
 final class SavedMark {
     private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("HH:mm:ss");
+
+    /** All digits of the screens' font are as wide as each other. */
+    private static final String WIDEST = "00:00:00";
 
     private SavedMark() {
     }
@@ -27,6 +31,12 @@ final class SavedMark {
             return scribe.savedAtProperty().get().map(at -> wording.text("screen.saved", TIME.format(at)))
                     .orElse("");
         }, scribe.troubleProperty(), scribe.waitingProperty(), scribe.savedAtProperty(), workplace.wordingProperty());
+    }
+
+    /** All words that it may say, as long as they can be. */
+    static List<String> words(Wording wording) {
+        return List.of(wording.text("screen.not-saved"), wording.text("screen.saving"),
+                wording.text("screen.saved", WIDEST));
     }
 
     /** Why the last act is not saved, in one sentence. */

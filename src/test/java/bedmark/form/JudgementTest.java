@@ -18,6 +18,7 @@ import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
 class JudgementTest {
     private static final Field LENGTH = Forms.zoneLength();
@@ -36,6 +37,24 @@ class JudgementTest {
     void rangesHoldInEveryUnit(String value, Unit unit, String code) {
         assertEquals(code.isEmpty() ? List.of() : List.of(code),
                 judge(LENGTH, survey("loadingZoneLength", quantity(value, unit))));
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"1.5", "2.5", "60"})
+    void judgementLooksAtNothingButThePlacesThatItIsSaidTo(String zone) {
+        Branch survey = survey("loadingZoneLength", quantity(zone, Unit.METRE))
+                .with(Pointer.parse("/readings/bedDepths"), new Node.Series(List.of(station("2.5", "0.3"))))
+                .with(Pointer.parse("/readings/seals"), new Node.Series(List.of(segment("left", "2.5"))))
+                .with(Pointer.parse("/readings/depthMethod"), Node.text("by-guess"))
+                .with(Pointer.parse("/readings/beltSpeed"), quantity("20", Unit.METRE_PER_SECOND))
+                .with(Pointer.parse("/readings/pulleySpeed"), Branch.EMPTY.with("diameter", quantity("0.5", Unit.METRE)));
+        for (Field field : List.of(LENGTH, SPEED, STATIONS, SEALS)) {
+            Branch looked = Branch.EMPTY;
+            for (Pointer place : field.judgedBy()) {
+                looked = survey.at(place).isPresent() ? looked.with(place, survey.at(place).get()) : looked;
+            }
+            assertEquals(field.judge(survey, Branch.EMPTY), field.judge(looked, Branch.EMPTY), field.key());
+        }
     }
 
     @Test

@@ -1,5 +1,6 @@
 package bedmark.screen.part;
 
+import java.util.List;
 import javafx.beans.property.StringProperty;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
@@ -7,6 +8,7 @@ import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import javafx.scene.layout.StackPane;
 
 /** The head of every screen: where the person is, at the right whether everything is saved. */
 public final class TopBar extends HBox {
@@ -30,6 +32,26 @@ public final class TopBar extends HBox {
         if (more.length > 0) {
             getStyleClass().add("with-button");
         }
+    }
+
+    /**
+     * Keeps room for whichever of these words stands at the right: a change from one to the other then lays out
+     * nothing but them. No other words may be set.
+     */
+    public void keepRoomFor(List<String> words) {
+        StackPane room = new StackPane();
+        room.setAlignment(Pos.CENTER_RIGHT);
+        for (String each : words) {
+            Label longest = Labels.label("room", each);
+            longest.setVisible(false);
+            room.getChildren().add(longest);
+        }
+        Island island = new Island(room);
+        island.setMinWidth(USE_PREF_SIZE);
+        // Told and not bound: what is bound has the bar laid out whenever the words change, managed as before or not.
+        aside.textProperty().subscribe(said -> island.setManaged(!said.isEmpty()));
+        getChildren().set(getChildren().indexOf(aside), island);
+        room.getChildren().add(aside);
     }
 
     public StringProperty titleProperty() {

@@ -6,9 +6,13 @@ import bedmark.document.Pointer;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Predicate;
+import java.util.regex.Pattern;
 
 /** Puts one cell's answer into a survey: an answer inside a list sets the whole list. */
 final class Answers {
+    private static final Predicate<String> IS_LINE = Pattern.compile("[0-9]{1,4}").asMatchPredicate();
+
     private Answers() {
     }
 
@@ -31,7 +35,7 @@ final class Answers {
             String index = where.tokens().get(length);
             Pointer outer = new Pointer(where.tokens().subList(0, length));
             Optional<Node> there = survey.at(outer);
-            if (index.matches("[0-9]{1,4}") && there.map(Node.Series.class::isInstance).orElse(true)) {
+            if (IS_LINE.test(index) && there.map(Node.Series.class::isInstance).orElse(true)) {
                 List<Node> items = new ArrayList<>(items(there));
                 Pointer inner = new Pointer(where.tokens().subList(length + 1, where.tokens().size()));
                 int line = Integer.parseInt(index);

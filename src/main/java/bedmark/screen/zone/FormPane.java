@@ -1,6 +1,8 @@
 package bedmark.screen.zone;
 
+import bedmark.document.Branch;
 import bedmark.document.Pointer;
+import bedmark.form.Field;
 import bedmark.form.Section;
 import bedmark.screen.Listening;
 import bedmark.screen.part.CautionStrip;
@@ -11,6 +13,7 @@ import bedmark.screen.part.SectionHeader;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -38,6 +41,7 @@ final class FormPane extends VBox {
     private final CautionStrip caution = new CautionStrip("");
     private final Label aside = new Label();
     private List<RowPlace> rows = List.of();
+    private Branch shown;
     private Optional<RowPlace> inHand = Optional.empty();
     /** Which rows are in the list: from the one to before the other. */
     private int from;
@@ -53,6 +57,7 @@ final class FormPane extends VBox {
         this.model = model;
         this.wording = wording;
         this.large = large;
+        this.shown = model.keptProperty().get();
         getStyleClass().add("form-pane");
         list.getStyleClass().add("rows");
         scroll.getStyleClass().add("form-scroll");
@@ -81,7 +86,7 @@ final class FormPane extends VBox {
         // Rows that came in above the active one, or grew, have moved it.
         list.heightProperty().addListener((property, before, now) -> revealing = true);
         listening.to(model.rowsProperty(), this::layOut);
-        listening.onChange(model.keptProperty(), kept -> rows.forEach(RowPlace::update));
+        listening.onChange(model.keptProperty(), this::kept);
         listening.onChange(model.typedProperty(), typed -> typed());
         listening.onChange(model.noteProperty(), note -> typed());
         listening.onChange(model.beltStateProperty(), state -> sayCaution());
@@ -175,6 +180,22 @@ final class FormPane extends VBox {
 
     private String title(Section section) {
         return section.title().in(wording.words().language());
+    }
+
+    /** Shows the rows anew that a change of the survey can have changed. */
+    private void kept(Branch now) {
+        Branch before = shown;
+        shown = now;
+        boolean marks = !before.at(CarriedOver.MARKS).equals(now.at(CarriedOver.MARKS));
+        Map<Field, Boolean> same = new IdentityHashMap<>();
+        for (RowPlace place : rows) {
+            Field field = place.row().field();
+            // The offer to take over moves on from field to field.
+            if (marks || CarriedOver.isPlain(field.key())
+                    || !same.computeIfAbsent(field, asked -> asked.judgesAlike(before, now))) {
+                place.update();
+            }
+        }
     }
 
     private void typed() {

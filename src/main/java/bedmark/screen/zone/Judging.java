@@ -27,9 +27,12 @@ final class Judging {
     private final FieldForm form;
     private final Branch last;
     private final Branch expected;
-    /** What was found in the document that was judged last: each cell of a table asks for its whole field. */
-    private final Map<Field, List<Judgement>> found = new IdentityHashMap<>();
-    private Branch judged = Branch.EMPTY;
+    /** What was found last: each cell of a table asks for its whole field, and a key changes few answers. */
+    private final Map<Field, Found> found = new IdentityHashMap<>();
+
+    /** What was found of a field in a document. */
+    private record Found(Branch document, List<Judgement> judgements) {
+    }
 
     /** What keeps a survey from being completed, and the place to mend it at. */
     record Obstacle(Pointer where, Note note) {
@@ -69,11 +72,14 @@ final class Judging {
     }
 
     private List<Judgement> judgements(Branch document, Field field) {
-        if (judged != document) {
-            found.clear();
-            judged = document;
+        Found before = found.get(field);
+        if (before != null && before.document == document) {
+            return before.judgements;
         }
-        return found.computeIfAbsent(field, asked -> judge(document, asked));
+        List<Judgement> judgements = before != null && field.judgesAlike(before.document, document)
+                ? before.judgements : judge(document, field);
+        found.put(field, new Found(document, judgements));
+        return judgements;
     }
 
     private List<Judgement> judge(Branch document, Field field) {

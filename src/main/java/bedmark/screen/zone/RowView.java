@@ -2,27 +2,16 @@ package bedmark.screen.zone;
 
 import bedmark.document.Node;
 import bedmark.document.Pointer;
-import bedmark.form.StationsField;
-import bedmark.quantity.Quality;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import bedmark.screen.pad.PadText;
-import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FieldBox;
 import bedmark.screen.part.Judgement;
-import bedmark.screen.part.QualityButton;
-import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
-import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import javafx.scene.control.Label;
-import javafx.scene.layout.GridPane;
-import javafx.scene.layout.HBox;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
 /** One row of the form: its name, the boxes of its cells, the mark of its reading, and below it what is to be said. */
@@ -31,11 +20,9 @@ final class RowView extends VBox {
     private final ZoneModel model;
     private final Wording wording;
     private final SlotWords words;
-    private final Map<Pointer, FieldBox> boxes = new LinkedHashMap<>();
+    private final RowCells cells;
     private final Label message = new Label();
     private final boolean quiet;
-    private Optional<QualityButton> quality = Optional.empty();
-    private Optional<ActionButton> carry = Optional.empty();
     private Optional<LineButtons> lineButtons = Optional.empty();
     private final Map<Pointer, Face> faces = new HashMap<>();
     private Said said = new Said("", Judgement.NONE);
@@ -59,13 +46,14 @@ final class RowView extends VBox {
         this.wording = wording;
         this.quiet = quiet;
         this.words = new SlotWords(wording, model.setting().register());
+        this.cells = new RowCells(row, model, wording, words, this::update);
         getStyleClass().add("reading-row");
         message.getStyleClass().addAll("message", "help");
         message.setWrapText(true);
         message.managedProperty().bind(message.visibleProperty());
         message.visibleProperty().bind(message.textProperty().isNotEmpty());
         message.setMinHeight(USE_PREF_SIZE);
-        getChildren().addAll(cells(), message);
+        getChildren().addAll(cells.pane(), message);
         if (row.line().isPresent() && model.open()) {
             lineButtons = Optional.of(new LineButtons(row, model, wording));
             lineButtons.ifPresent(getChildren()::add);
@@ -77,112 +65,25 @@ final class RowView extends VBox {
         return row;
     }
 
-    private String name() {
-        String field = row.field().head().label().in(wording.words().language());
-        return row.line().map(line -> wording.text("screen.zone.line", line, field)).orElse(field);
-    }
-
-    private javafx.scene.Node cells() {
-        row.slots().forEach(slot -> boxes.put(slot.where(), box(slot)));
-        quality = row.slots().stream().filter(slot -> slot instanceof Slot.MeasureSlot measured && measured.markable())
-                .findFirst().map(this::quality);
-        List<FieldBox> cells = new ArrayList<>(boxes.values());
-        if (cells.size() == 4) {
-            GridPane grid = new GridPane();
-            grid.getStyleClass().add("cells");
-            cells.forEach(cell -> {
-                GridPane.setHgrow(cell, Priority.ALWAYS);
-                cell.setPrefWidth(100);
-            });
-            grid.getChildren().addAll(cells);
-            turned(false);
-            return grid;
-        }
-        HBox line = new HBox();
-        line.getStyleClass().add("row");
-        cells.forEach(cell -> HBox.setHgrow(cell, Priority.ALWAYS));
-        if (cells.size() == 2) {
-            cells.get(1).withGhostAbove();
-            cells.get(0).getStyleClass().add("narrow");
-            HBox.setHgrow(cells.get(0), Priority.NEVER);
-        }
-        line.getChildren().addAll(cells);
-        quality.ifPresent(line.getChildren()::add);
-        if (CarriedOver.isPlain(row.field().key())) {
-            carry = Optional.of(carryButton());
-            carry.ifPresent(line.getChildren()::add);
-        }
-        return line;
-    }
-
-    /** Takes the geometry of the last survey over: an act of its own, beside the first thing that it fills in. */
-    private ActionButton carryButton() {
-        ActionButton button = new ActionButton(Weight.PLAIN, wording.text("zone.carry-over"),
-                model.tables()::carryOver);
-        button.setId("carry-over");
-        button.getStyleClass().add("beside");
-        button.setMinWidth(0);
-        return button;
-    }
-
-    /** Four cells stand two by two, or side by side where the tablet stands upright. */
+    /** Told when the tablet is turned. */
     void turned(boolean upright) {
-        int across = upright ? 4 : 2;
-        int place = 0;
-        for (FieldBox cell : boxes.size() == 4 ? boxes.values() : List.<FieldBox>of()) {
-            GridPane.setConstraints(cell, place % across, place / across);
-            place++;
-        }
-    }
-
-    private FieldBox box(Slot slot) {
-        FieldBox box = new FieldBox(name() + ", " + words.label(slot), () -> model.activate(slot));
-        box.nameProperty().set(boxName(slot));
-        box.setId("slot" + slot.where().toString().replace('/', '-'));
-        if (!(slot instanceof Slot.MeasureSlot || slot instanceof Slot.CountSlot)) {
-            box.ofWords();
-        }
-        return box;
-    }
-
-    /** A narrow box has no room for more than the number of its line and one word. */
-    private String boxName(Slot slot) {
-        if (row.line().isEmpty() || slot != row.slots().get(0)) {
-            return words.label(slot);
-        }
-        return row.field() instanceof StationsField ? wording.text("screen.zone.station", row.line().get())
-                : wording.text("screen.zone.line", row.line().get(), words.label(slot));
+        cells.turned(upright);
     }
 
     /** The active box, where it is in this row. */
     Optional<FieldBox> activeBox() {
-        return Optional.ofNullable(boxes.get(model.active().where()));
-    }
-
-    private QualityButton quality(Slot slot) {
-        QualityButton button = new QualityButton(Quality.MEASURED,
-                mark -> wording.text("screen.quality." + mark.code()),
-                mark -> {
-                    model.activate(slot);
-                    model.mark(mark);
-                    update();
-                });
-        button.setId("quality" + slot.where().toString().replace('/', '-'));
-        return button;
+        return cells.at(model.active().where());
     }
 
     /** Shows what the survey holds now. */
     void update() {
         for (Slot slot : row.slots()) {
-            update(slot, boxes.get(slot.where()));
+            update(slot, cells.at(slot.where()).orElseThrow());
         }
         said = saying();
         message.setText(quiet ? "" : said.words());
         said.judgement().dress(message);
-        carry.ifPresent(button -> {
-            button.setVisible(model.tables().carriesOverAt(row.field().key()));
-            button.setManaged(button.isVisible());
-        });
+        cells.offer();
         lineButtons.ifPresent(LineButtons::update);
     }
 
@@ -217,13 +118,9 @@ final class RowView extends VBox {
         }
         box.judgementProperty().set(judged(slot, face.active()));
         box.carriedProperty().set(model.carriedOver(slot));
-        quality.filter(button -> slot instanceof Slot.MeasureSlot measured && measured.markable()).ifPresent(button -> {
-            // A press turns the button before it is known whether the reading can be marked so.
-            Optional<Quality> mark = face.answer().flatMap(SlotWords::quality);
-            button.setVisible(mark.isPresent());
-            button.setManaged(mark.isPresent());
-            mark.ifPresent(button.qualityProperty()::set);
-        });
+        if (slot instanceof Slot.MeasureSlot measured && measured.markable()) {
+            cells.mark(face.answer().flatMap(SlotWords::quality));
+        }
     }
 
     private Face face(Slot slot) {
@@ -286,6 +183,6 @@ final class RowView extends VBox {
 
     /** Whether the active cell is in this row. */
     boolean holdsActive() {
-        return boxes.containsKey(model.active().where());
+        return cells.holds(model.active().where());
     }
 }

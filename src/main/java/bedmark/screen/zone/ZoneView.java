@@ -9,6 +9,7 @@ import bedmark.screen.Screen;
 import bedmark.screen.Workplace;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
+import bedmark.screen.part.Island;
 import bedmark.screen.part.RoundTicks;
 import bedmark.screen.part.Verdict;
 import bedmark.screen.part.VerdictBlock;
@@ -48,6 +49,8 @@ public final class ZoneView implements Screen {
     private final VerdictBlock verdict;
     private final VBox work = new VBox();
     private final VBox result = new VBox();
+    /** What it comes to takes the room that the form leaves, however much there is to say. */
+    private final Island besides = new Island(result);
     private final BorderPane body = new BorderPane();
     private final VBox head;
     private final javafx.scene.Node foot;
@@ -245,11 +248,11 @@ public final class ZoneView implements Screen {
         work.getStyleClass().setAll("work", portrait ? "portrait" : "landscape");
         result.getStyleClass().setAll("result", portrait ? "portrait" : "landscape", large ? "gloved" : "bare");
         if (portrait) {
-            body.setTop(result);
+            body.setTop(besides);
             body.setCenter(work);
         } else {
             body.setLeft(work);
-            body.setCenter(result);
+            body.setCenter(besides);
         }
         form.turned(portrait);
         entry.turned(portrait);

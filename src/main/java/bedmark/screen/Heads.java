@@ -24,7 +24,7 @@ public final class Heads {
         TopBar bar = new TopBar(more);
         bar.titleProperty().set(title);
         bar.subtitleProperty().set(subtitle);
-        bar.keepRoomFor(SavedMark.words(workplace.wording()));
+        bar.keepRoomFor(SavedMark.longest(workplace.wording()));
         listening.to(SavedMark.of(workplace), bar.asideProperty()::set);
         VBox head = new VBox(bar);
         listening.to(workplace.scribe().troubleProperty(), defect -> {

@@ -2,7 +2,6 @@ package bedmark.screen;
 
 import bedmark.wording.Wording;
 import java.time.format.DateTimeFormatter;
-import java.util.List;
 import java.util.Optional;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.StringBinding;
@@ -12,7 +11,7 @@ final class SavedMark {
     private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("HH:mm:ss");
 
     /** All digits of the screens' font are as wide as each other. */
-    private static final String WIDEST = "00:00:00";
+    private static final String ANY_TIME = "00:00:00";
 
     private SavedMark() {
     }
@@ -33,10 +32,9 @@ final class SavedMark {
         }, scribe.troubleProperty(), scribe.waitingProperty(), scribe.savedAtProperty(), workplace.wordingProperty());
     }
 
-    /** All words that it may say, as long as they can be. */
-    static List<String> words(Wording wording) {
-        return List.of(wording.text("screen.not-saved"), wording.text("screen.saving"),
-                wording.text("screen.saved", WIDEST));
+    /** As long as anything that it says. */
+    static String longest(Wording wording) {
+        return wording.text("screen.saved", ANY_TIME);
     }
 
     /** Why the last act is not saved, in one sentence. */

@@ -1,6 +1,5 @@
 package bedmark.screen.part;
 
-import java.util.List;
 import javafx.beans.property.StringProperty;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
@@ -35,17 +34,14 @@ public final class TopBar extends HBox {
     }
 
     /**
-     * Keeps room for whichever of these words stands at the right: a change from one to the other then lays out
-     * nothing but them. No other words may be set.
+     * Keeps as much room for what is said at the right as these words take: a change of what is said then lays out
+     * nothing else. Nothing longer may be said.
      */
-    public void keepRoomFor(List<String> words) {
-        StackPane room = new StackPane();
+    public void keepRoomFor(String words) {
+        Label longest = Labels.label("room", words);
+        longest.setVisible(false);
+        StackPane room = new StackPane(longest);
         room.setAlignment(Pos.CENTER_RIGHT);
-        for (String each : words) {
-            Label longest = Labels.label("room", each);
-            longest.setVisible(false);
-            room.getChildren().add(longest);
-        }
         Island island = new Island(room);
         island.setMinWidth(USE_PREF_SIZE);
         // Told and not bound: what is bound has the bar laid out whenever the words change, managed as before or not.

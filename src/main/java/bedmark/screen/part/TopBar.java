@@ -45,7 +45,10 @@ public final class TopBar extends HBox {
         Island island = new Island(room);
         island.setMinWidth(USE_PREF_SIZE);
         // Told and not bound: what is bound has the bar laid out whenever the words change, managed as before or not.
-        aside.textProperty().subscribe(said -> island.setManaged(!said.isEmpty()));
+        aside.textProperty().subscribe(said -> {
+            island.setManaged(!said.isEmpty());
+            island.setVisible(!said.isEmpty());
+        });
         getChildren().set(getChildren().indexOf(aside), island);
         room.getChildren().add(aside);
     }

@@ -69,8 +69,12 @@ public record Pointer(List<String> tokens) {
         return tokens.get(tokens.size() - 1);
     }
 
-    /** The index that a token is within a list, as RFC 6901 writes one; -1 where it is none of at most nine digits. */
-    static int index(String token) {
+    /**
+     * The place within a list that a token says, as RFC 6901 writes one.
+     *
+     * @return 0 or more; -1 where it says none, or one of more than nine digits
+     */
+    public static int index(String token) {
         if (token.isEmpty() || token.length() > 9 || token.charAt(0) == '0' && token.length() > 1) {
             return -1;
         }

@@ -26,7 +26,10 @@ public sealed interface Field permits TextField, NumberField, QuantityField, Cho
         return List.of(where());
     }
 
-    /** All places of a survey that {@link #judge} looks at: while nothing changes there, its judgement stays. */
+    /**
+     * All places of a survey that {@link #judge} looks at, those that the field asks for among them: while nothing
+     * changes there, its judgement stays.
+     */
     default List<Pointer> judgedBy() {
         return places();
     }

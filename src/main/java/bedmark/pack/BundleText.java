@@ -10,6 +10,8 @@ final class BundleText {
     }
 
     /**
+     * The text, where it keeps within the limits.
+     *
      * @throws Refused {@code pack-bundle-too-large}, {@code pack-bundle-too-full}
      */
     static byte[] bounded(byte[] text, PackLimits limits) {

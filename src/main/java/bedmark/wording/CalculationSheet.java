@@ -117,7 +117,7 @@ public final class CalculationSheet {
                 continue;
             }
             Pointer place = Pointer.parse(input.symbol().reading().orElseThrow());
-            boolean inRow = place.tokens().stream().anyMatch(token -> token.matches("[0-9]+"));
+            boolean inRow = place.tokens().stream().anyMatch(token -> Pointer.index(token) >= 0);
             (inRow ? rows : single).add(inRow ? value(input) + mark(survey, place)
                     : value(input) + mark(survey, place) + " " + label(place));
         }

@@ -193,7 +193,7 @@ public record Wording(Words words, UnitSystem units, Map<Unit, Unit> liked) {
      */
     public String reading(String name, FieldForm form) {
         Pointer place = Pointer.parse(name);
-        Optional<String> line = place.tokens().stream().filter(token -> token.matches("[0-9]+")).findFirst()
+        Optional<String> line = place.tokens().stream().filter(token -> Pointer.index(token) >= 0).findFirst()
                 .map(index -> format().computed(Double.parseDouble(index) + 1, 0));
         String label = form.fieldAt(place).map(field -> inSentence(field.head().label().in(words.language())))
                 .orElseGet(() -> {

@@ -6,12 +6,11 @@ import bedmark.document.Pointer;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.Predicate;
-import java.util.regex.Pattern;
 
 /** Puts one cell's answer into a survey: an answer inside a list sets the whole list. */
 final class Answers {
-    private static final Predicate<String> IS_LINE = Pattern.compile("[0-9]{1,4}").asMatchPredicate();
+    /** Lines of a table, more than anybody enters. */
+    private static final int MOST_LINES = 10_000;
 
     private Answers() {
     }
@@ -32,13 +31,12 @@ final class Answers {
      */
     static Change change(Branch survey, Pointer where, Optional<Node> answer) {
         for (int length = 1; length < where.tokens().size(); length++) {
-            String index = where.tokens().get(length);
+            int line = Pointer.index(where.tokens().get(length));
             Pointer outer = new Pointer(where.tokens().subList(0, length));
             Optional<Node> there = survey.at(outer);
-            if (IS_LINE.test(index) && there.map(Node.Series.class::isInstance).orElse(true)) {
+            if (line >= 0 && line < MOST_LINES && there.map(Node.Series.class::isInstance).orElse(true)) {
                 List<Node> items = new ArrayList<>(items(there));
                 Pointer inner = new Pointer(where.tokens().subList(length + 1, where.tokens().size()));
-                int line = Integer.parseInt(index);
                 while (items.size() <= line) {
                     items.add(Branch.EMPTY);
                 }

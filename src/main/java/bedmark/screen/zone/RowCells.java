@@ -26,7 +26,7 @@ final class RowCells {
     private final SlotWords words;
     private final Map<Pointer, FieldBox> boxes = new LinkedHashMap<>();
     private final Optional<QualityButton> quality;
-    private Optional<ActionButton> carry = Optional.empty();
+    private final Optional<ActionButton> carry;
     private final Pane pane;
 
     /** @param marked runs when a person marked the reading */
@@ -39,6 +39,7 @@ final class RowCells {
         this.quality = row.slots().stream()
                 .filter(slot -> slot instanceof Slot.MeasureSlot measured && measured.markable())
                 .findFirst().map(slot -> quality(slot, marked));
+        this.carry = CarriedOver.isPlain(row.field().key()) ? Optional.of(carryButton()) : Optional.empty();
         this.pane = laidOut();
     }
 
@@ -49,10 +50,6 @@ final class RowCells {
     /** The box of the cell at a place, where it is in this row. */
     Optional<FieldBox> at(Pointer where) {
         return Optional.ofNullable(boxes.get(where));
-    }
-
-    boolean holds(Pointer where) {
-        return boxes.containsKey(where);
     }
 
     private String name() {
@@ -83,10 +80,7 @@ final class RowCells {
         }
         line.getChildren().addAll(cells);
         quality.ifPresent(line.getChildren()::add);
-        if (CarriedOver.isPlain(row.field().key())) {
-            carry = Optional.of(carryButton());
-            carry.ifPresent(line.getChildren()::add);
-        }
+        carry.ifPresent(line.getChildren()::add);
         return line;
     }
 

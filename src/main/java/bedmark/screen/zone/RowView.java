@@ -183,6 +183,6 @@ final class RowView extends VBox {
 
     /** Whether the active cell is in this row. */
     boolean holdsActive() {
-        return cells.holds(model.active().where());
+        return activeBox().isPresent();
     }
 }

@@ -1,6 +1,7 @@
 package bedmark.screen.zone;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Pointer;
@@ -93,7 +94,9 @@ class FormPaneTest {
 
     private void rowsSayWhatRowsBuiltNowSay(String after) {
         scene.getRoot().lookupAll(".row-place").forEach(place -> ((RowPlace) place).build());
-        for (Node node : scene.getRoot().lookupAll(".reading-row")) {
+        Set<Node> rows = scene.getRoot().lookupAll(".reading-row");
+        assertFalse(rows.isEmpty(), "rows are shown after " + after);
+        for (Node node : rows) {
             RowView shown = (RowView) node;
             seen.add(shown.row().place());
             assertEquals(RowSeen.in(new RowView(shown.row(), model, person.wording(), false)), RowSeen.in(shown),

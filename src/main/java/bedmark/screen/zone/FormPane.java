@@ -89,7 +89,11 @@ final class FormPane extends VBox {
         listening.onChange(model.keptProperty(), this::kept);
         listening.onChange(model.typedProperty(), typed -> typed());
         listening.onChange(model.noteProperty(), note -> typed());
-        listening.onChange(model.beltStateProperty(), state -> sayCaution());
+        listening.onChange(model.beltStateProperty(), state -> {
+            sayCaution();
+            // What is being typed carries the belt's state, and may be no measurement any more.
+            typed();
+        });
         listening.to(model.inHandProperty(), inHand -> activated());
     }
 

@@ -83,6 +83,7 @@ public final class ZoneModel {
         this.outcome = new ReadOnlyObjectWrapper<>(judge(document()));
         work.documentProperty().addListener((property, before, now) -> refresh());
         typed.addListener((property, before, now) -> preview());
+        beltState.addListener((property, before, now) -> preview());
         this.undoable = typed.isNotEmpty().or(work.undoableProperty());
         this.units.addListener((property, before, now) -> unitChanged());
         this.locale.addListener((property, before, now) -> localeChanged(before));
@@ -357,7 +358,6 @@ public final class ZoneModel {
     /** Says what the belt does now; readings from here on carry it. */
     public void sayBeltState(BeltState state) {
         beltState.set(Optional.of(state));
-        preview();
     }
 
     /** Marks the active reading. A depth is measured on an isolated belt only. */

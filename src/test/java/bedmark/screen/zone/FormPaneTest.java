@@ -5,9 +5,12 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Pointer;
+import bedmark.quantity.BeltState;
+import bedmark.quantity.Quality;
 import bedmark.quantity.UnitSystem;
 import bedmark.screen.Glass;
 import bedmark.screen.Listening;
+import bedmark.screen.part.QualityButton;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
 import bedmark.survey.Survey;
@@ -58,6 +61,8 @@ class FormPaneTest {
                 person.act();
                 if (before != model.unitsProperty().get()) {
                     scene.setRoot(form());
+                    // No frame comes between the acts; without its look the form shows no row.
+                    scene.getRoot().applyCss();
                 }
                 rowsSayWhatRowsBuiltNowSay("act " + i);
             }
@@ -90,6 +95,25 @@ class FormPaneTest {
             rowsSayWhatRowsBuiltNowSay("the first line went");
             return null;
         });
+    }
+
+    @Test
+    void depthInHandIsEstimatedAsSoonAsTheBeltIsSaidToRun() throws Exception {
+        Glass.on(() -> {
+            model.sayBeltState(BeltState.ISOLATED);
+            model.activate(BedLines.depth(0));
+            model.typedProperty().set("262");
+            assertEquals(Quality.MEASURED, markOfDepth());
+            model.sayBeltState(BeltState.RUNNING_LOADED);
+            assertEquals(Quality.ESTIMATED, markOfDepth());
+            rowsSayWhatRowsBuiltNowSay("the belt runs");
+            return null;
+        });
+    }
+
+    private Quality markOfDepth() {
+        return ((QualityButton) scene.lookup("#quality" + BedLines.depth(0).toString().replace('/', '-')))
+                .qualityProperty().get();
     }
 
     private void rowsSayWhatRowsBuiltNowSay(String after) {

@@ -199,6 +199,10 @@ public record Branch(Members members) implements Node {
 
     /** This object read as a quantity; its keys are those of the data page. */
     public Quantity asQuantity() {
+        return members.quantity(this::readQuantity);
+    }
+
+    private Quantity readQuantity() {
         BigDecimal value = number("value").orElseThrow(() -> absent("value"));
         String code = text("unit").orElseThrow(() -> absent("unit"));
         Unit unit = Unit.ofCode(code)
@@ -225,7 +229,9 @@ public record Branch(Members members) implements Node {
         quantity.quality().ifPresent(quality -> members.put("quality", new Text(quality.code())));
         quantity.at().ifPresent(at -> members.put("at", Node.time(at)));
         quantity.beltState().ifPresent(state -> members.put("beltState", new Text(state.code())));
-        return new Branch(members);
+        Branch written = new Branch(members);
+        written.members.quantity(() -> quantity);
+        return written;
     }
 
     private static Refused absent(String key) {

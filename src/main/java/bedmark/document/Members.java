@@ -1,5 +1,6 @@
 package bedmark.document;
 
+import bedmark.quantity.Quantity;
 import java.util.AbstractMap;
 import java.util.AbstractSet;
 import java.util.Arrays;
@@ -8,6 +9,7 @@ import java.util.Map;
 import java.util.NoSuchElementException;
 import java.util.Objects;
 import java.util.Set;
+import java.util.function.Supplier;
 
 /**
  * What an object of a document holds, in its written order, and never changed. Documents are made of very many small
@@ -22,6 +24,11 @@ public final class Members extends AbstractMap<String, Node> {
     private final Node[] values;
     /** By the hash of each key its place, and one more; absent where keys are compared. */
     private final int[] places;
+    /**
+     * What the members were read as. Whoever judges a survey after a key reads all its quantities anew, of which the
+     * key changed one; two threads that read at once write the same.
+     */
+    private Quantity quantity;
 
     /** The arrays are this object's own from now on. */
     private Members(String[] keys, Node[] values) {
@@ -157,6 +164,16 @@ public final class Members extends AbstractMap<String, Node> {
             }
         }
         return this;
+    }
+
+    /** The members as a quantity: what they were read as before, else what the reader makes of them now. */
+    Quantity quantity(Supplier<Quantity> reader) {
+        Quantity read = quantity;
+        if (read == null) {
+            read = reader.get();
+            quantity = read;
+        }
+        return read;
     }
 
     /** @param place 0 or more and less than {@link #size()} */

@@ -2,6 +2,7 @@ package bedmark.document;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -11,6 +12,7 @@ import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import java.math.BigDecimal;
 import java.time.OffsetDateTime;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -23,6 +25,24 @@ class BranchTest {
                 Optional.of(new BigDecimal("0.10")), Optional.of(Quality.SUSPECT),
                 Optional.of(OffsetDateTime.parse("2026-03-01T08:30:00+01:00")), Optional.of(BeltState.ISOLATED));
         assertEquals(quantity, Branch.EMPTY.with("depth", quantity).quantity("depth").orElseThrow());
+        Branch readFromAFile = new Branch(new LinkedHashMap<>(Branch.write(quantity).members()));
+        assertEquals(quantity, readFromAFile.asQuantity());
+    }
+
+    @Test
+    void quantityIsReadOnceAndAnewWhereAKeyOfItChanged() {
+        Branch depth = Branch.EMPTY.with("value", Node.number(262)).with("unit", "mm").with("quality", "measured");
+        assertSame(depth.asQuantity(), depth.asQuantity());
+        assertEquals(Optional.of(Quality.SUSPECT), depth.with("quality", "suspect").asQuantity().quality());
+        assertEquals(Optional.empty(), depth.without("quality").asQuantity().quality());
+        assertEquals(Optional.of(Quality.MEASURED), depth.asQuantity().quality());
+    }
+
+    @Test
+    void whatIsNoQuantityIsRefusedEachTimeItIsAsked() {
+        Branch depth = Branch.EMPTY.with("value", Node.number(262));
+        assertThrows(Refused.class, depth::asQuantity);
+        assertThrows(Refused.class, depth::asQuantity);
     }
 
     @Test

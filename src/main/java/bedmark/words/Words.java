@@ -3,8 +3,10 @@ package bedmark.words;
 import java.text.MessageFormat;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.MissingResourceException;
 import java.util.ResourceBundle;
+import java.util.concurrent.ConcurrentHashMap;
 
 /**
  * The words of one language. A key is {@code bundle.key}: the part before the first dot names the resource bundle
@@ -19,6 +21,8 @@ public final class Words {
             ResourceBundle.Control.getNoFallbackControl(ResourceBundle.Control.FORMAT_PROPERTIES);
 
     private final Locale locale;
+    /** The texts that were asked for: a screen says the same ones at each key. */
+    private final Map<String, MessageFormat> texts = new ConcurrentHashMap<>();
 
     /**
      * @param locale language of the words and format of the numbers; a language without words gets the English ones
@@ -42,12 +46,18 @@ public final class Words {
      * @throws MissingResourceException where no bundle has the key; a test walks all keys that the code uses
      */
     public String text(String key, Object... arguments) {
+        MessageFormat text = texts.computeIfAbsent(key, this::read);
+        synchronized (text) {
+            return text.format(arguments);
+        }
+    }
+
+    private MessageFormat read(String key) {
         int dot = key.indexOf('.');
         if (dot < 0) {
             throw new MissingResourceException("a key names its bundle: " + key, "Words", key);
         }
-        String pattern = bundle(key.substring(0, dot)).getString(key.substring(dot + 1));
-        return new MessageFormat(pattern, locale).format(arguments);
+        return new MessageFormat(bundle(key.substring(0, dot)).getString(key.substring(dot + 1)), locale);
     }
 
     /** Whether there is a text for the key. */

@@ -33,37 +33,44 @@ final class Texture {
 
     /** Staggered dots, that far apart, that lie wholly in the polygon. */
     static List<Point> grain(List<Point> region, double spacing, double radius) {
-        double left = region.stream().mapToDouble(Point::x).min().orElse(0);
-        double right = region.stream().mapToDouble(Point::x).max().orElse(0);
-        double top = region.stream().mapToDouble(Point::y).min().orElse(0);
-        double bottom = region.stream().mapToDouble(Point::y).max().orElse(0);
+        double top = Double.POSITIVE_INFINITY;
+        double bottom = Double.NEGATIVE_INFINITY;
+        for (Point corner : region) {
+            top = Math.min(top, corner.y());
+            bottom = Math.max(bottom, corner.y());
+        }
         double rise = spacing * 0.75;
         List<Point> dots = new ArrayList<>();
         for (long row = (long) Math.ceil(top / rise); row * rise <= bottom; row++) {
+            double[] cuts = crossings(region, row * rise);
             double shift = row % 2 == 0 ? 0 : spacing / 2;
-            long first = (long) Math.ceil((left - shift) / spacing);
-            for (long column = first; column * spacing + shift <= right; column++) {
-                Point dot = new Point(column * spacing + shift, row * rise);
-                if (holds(region, dot) && clear(region, dot, 2 * radius)) {
-                    dots.add(dot);
+            for (int cut = 0; cut + 1 < cuts.length; cut += 2) {
+                long column = (long) Math.ceil((cuts[cut] - shift) / spacing);
+                for (; column * spacing + shift < cuts[cut + 1]; column++) {
+                    Point dot = new Point(column * spacing + shift, row * rise);
+                    if (clear(region, dot, 2 * radius)) {
+                        dots.add(dot);
+                    }
                 }
             }
         }
         return dots;
     }
 
-    /** Whether the point lies in the polygon (even-odd rule). */
-    static boolean holds(List<Point> region, Point point) {
-        boolean inside = false;
+    /** Where a level line crosses the polygon's edge, from left to right: the polygon lies between each two. */
+    private static double[] crossings(List<Point> region, double level) {
+        double[] crossings = new double[region.size()];
+        int count = 0;
         for (int i = 0; i < region.size(); i++) {
             Point a = region.get(i);
             Point b = region.get((i + 1) % region.size());
-            if (a.y() > point.y() != b.y() > point.y()
-                    && point.x() < a.x() + (point.y() - a.y()) / (b.y() - a.y()) * (b.x() - a.x())) {
-                inside = !inside;
+            if (a.y() > level != b.y() > level) {
+                crossings[count++] = a.x() + (level - a.y()) / (b.y() - a.y()) * (b.x() - a.x());
             }
         }
-        return inside;
+        double[] sorted = Arrays.copyOf(crossings, count);
+        Arrays.sort(sorted);
+        return sorted;
     }
 
     private static boolean clear(List<Point> region, Point dot, double radius) {

@@ -99,7 +99,7 @@ class ZonePictureTest {
         List<Mark.Area> beds = picture.drawing().each(Mark.Area.class).filter(area -> area.fill() == Ink.BED).toList();
         labels(picture).stream().filter(label -> label.plate().isEmpty()).forEach(label ->
                 beds.forEach(bed -> Stream.concat(label.box().corners().stream(), Stream.of(label.box().centre()))
-                        .forEach(point -> assertFalse(Texture.holds(bed.outline(), point), label::toString))));
+                        .forEach(point -> assertFalse(TextureTest.holds(bed.outline(), point), label::toString))));
     }
 
     @ParameterizedTest

@@ -17,18 +17,21 @@ import bedmark.form.SpeedField.Way;
 import bedmark.form.StationsField;
 import bedmark.form.TextField;
 import java.util.ArrayList;
+import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 
-/** Lays a form out as rows of cells; each kind of field has its one way of doing so. */
+/**
+ * Lays a form out as rows of cells; each kind of field has its one way of doing so. A key changes few answers and
+ * seldom any row, so that what was laid out before is kept.
+ */
 final class Slots {
 
     /** Lays out one kind of field. */
     @FunctionalInterface
     private interface Layout {
-        List<SlotRow> rows(Section section, Field field, Branch survey, Ways ways);
+        List<SlotRow> rows(Section section, Field field, Shape shape);
     }
 
     /** The way of reading the speed that the person chose, where the survey does not tell yet. */
@@ -37,40 +40,73 @@ final class Slots {
         Way of(SpeedField field);
     }
 
-    private static final Map<Class<? extends Field>, Layout> LAYOUTS = Map.of(
-            TextField.class, (section, field, survey, ways) -> one(section, field,
-                    new Slot.TextSlot((TextField) field, field.where(), field.head().label())),
-            NumberField.class, (section, field, survey, ways) -> one(section, field,
-                    new Slot.CountSlot(field, field.where(), field.head().label(), ((NumberField) field).count())),
-            QuantityField.class, (section, field, survey, ways) -> one(section, field, new Slot.MeasureSlot(field,
-                    field.where(), field.head().label(), ((QuantityField) field).measure(), true)),
-            ChoiceField.class, (section, field, survey, ways) -> one(section, field, new Slot.ChoiceSlot(field,
-                    field.where(), field.head().label(), ((ChoiceField) field).choices())),
-            FlagField.class, (section, field, survey, ways) -> one(section, field,
-                    new Slot.FlagSlot(field, field.where(), field.head().label())),
-            SpeedField.class, (section, field, survey, ways) -> speed(section, (SpeedField) field, ways),
-            StationsField.class, (section, field, survey, ways) -> stations(section, (StationsField) field, survey),
-            SealsField.class, (section, field, survey, ways) -> seals(section, (SealsField) field, survey));
-
-    private Slots() {
+    /**
+     * All that decides which rows a field has, besides the form.
+     *
+     * @param lines of a table; none elsewhere
+     * @param way   in which the speed is read; nothing elsewhere
+     */
+    private record Shape(int lines, Optional<Way> way) {
+        static Shape of(Field field, Branch survey, Ways ways) {
+            int lines = field.answer(survey).filter(Node.Series.class::isInstance)
+                    .map(answer -> ((Node.Series) answer).items().size()).orElse(0);
+            return new Shape(lines, field instanceof SpeedField speed ? Optional.of(ways.of(speed)) : Optional.empty());
+        }
     }
 
-    /** The rows of a form as the survey stands; only what the form shows. */
-    static List<SlotRow> rows(FieldForm form, Branch survey, Ways ways) {
-        List<SlotRow> rows = new ArrayList<>();
+    /** How a field was laid out last. */
+    private record Laid(Shape shape, List<SlotRow> rows) {
+    }
+
+    private static final Map<Class<? extends Field>, Layout> LAYOUTS = Map.of(
+            TextField.class, (section, field, shape) -> one(section, field,
+                    new Slot.TextSlot((TextField) field, field.where(), field.head().label())),
+            NumberField.class, (section, field, shape) -> one(section, field,
+                    new Slot.CountSlot(field, field.where(), field.head().label(), ((NumberField) field).count())),
+            QuantityField.class, (section, field, shape) -> one(section, field, new Slot.MeasureSlot(field,
+                    field.where(), field.head().label(), ((QuantityField) field).measure(), true)),
+            ChoiceField.class, (section, field, shape) -> one(section, field, new Slot.ChoiceSlot(field,
+                    field.where(), field.head().label(), ((ChoiceField) field).choices())),
+            FlagField.class, (section, field, shape) -> one(section, field,
+                    new Slot.FlagSlot(field, field.where(), field.head().label())),
+            SpeedField.class, (section, field, shape) -> speed(section, (SpeedField) field, shape.way().orElseThrow()),
+            StationsField.class, (section, field, shape) -> stations(section, (StationsField) field, shape.lines()),
+            SealsField.class, (section, field, shape) -> seals(section, (SealsField) field, shape.lines()));
+
+    private final FieldForm form;
+    private final Map<Field, Laid> laid = new IdentityHashMap<>();
+    private List<Laid> shown = List.of();
+    private List<SlotRow> rows = List.of();
+
+    Slots(FieldForm form) {
+        this.form = form;
+    }
+
+    /** The rows of the form as the survey stands; only what the form shows, and the same list where nothing changed. */
+    List<SlotRow> rows(Branch survey, Ways ways) {
+        List<Laid> now = new ArrayList<>(shown.size());
         for (Section section : form.sections()) {
             for (Field field : section.fields()) {
                 if (form.shows(field, survey)) {
-                    rows.addAll(LAYOUTS.get(field.getClass()).rows(section, field, survey, ways));
+                    now.add(laid(section, field, Shape.of(field, survey, ways)));
                 }
             }
+        }
+        if (!now.equals(shown)) {
+            shown = now;
+            rows = now.stream().flatMap(each -> each.rows().stream()).toList();
         }
         return rows;
     }
 
-    /** The kinds of field that can be laid out. */
-    static Set<Class<? extends Field>> kinds() {
-        return LAYOUTS.keySet();
+    private Laid laid(Section section, Field field, Shape shape) {
+        Laid before = laid.get(field);
+        if (before != null && before.shape().equals(shape)) {
+            return before;
+        }
+        Laid now = new Laid(shape, LAYOUTS.get(field.getClass()).rows(section, field, shape));
+        laid.put(field, now);
+        return now;
     }
 
     private static List<SlotRow> one(Section section, Field field, Slot slot) {
@@ -81,14 +117,13 @@ final class Slots {
         return new SlotRow(section, field, place, Optional.empty(), List.of(slots), Optional.empty());
     }
 
-    private static List<SlotRow> speed(Section section, SpeedField field, Ways ways) {
+    private static List<SlotRow> speed(Section section, SpeedField field, Way way) {
         List<SlotRow> rows = new ArrayList<>();
         List<Choice> choices = List.of(new Choice(Way.DIRECT.key(), field.direct().label()),
                 new Choice(Way.TIMED.key(), field.timed().label()),
                 new Choice(Way.PULLEY.key(), field.pulley().label()));
         rows.add(row(section, field, field.where().child("way"),
                 new Slot.WaySlot(field, field.where().child("way"), field.head().label(), choices)));
-        Way way = ways.of(field);
         switch (way) {
             case DIRECT -> rows.add(row(section, field, way.where(), new Slot.MeasureSlot(field, way.where(),
                     field.direct().label(), field.direct().speed(), true)));
@@ -112,11 +147,10 @@ final class Slots {
         return row(section, field, where, new Slot.MeasureSlot(field, where, part.label(), part.measure(), true));
     }
 
-    private static List<SlotRow> stations(Section section, StationsField field, Branch survey) {
+    private static List<SlotRow> stations(Section section, StationsField field, int lines) {
         List<SlotRow> rows = new ArrayList<>();
         rows.add(row(section, field, StationsField.METHOD, new Slot.ChoiceSlot(field, StationsField.METHOD,
                 field.head().label(), field.methods())));
-        int lines = lines(field, survey);
         for (int i = 0; i < Math.max(1, lines); i++) {
             Pointer place = field.where().child(i);
             rows.add(new SlotRow(section, field, place, Optional.of(i + 1), List.of(
@@ -127,9 +161,8 @@ final class Slots {
         return rows;
     }
 
-    private static List<SlotRow> seals(Section section, SealsField field, Branch survey) {
+    private static List<SlotRow> seals(Section section, SealsField field, int lines) {
         List<SlotRow> rows = new ArrayList<>();
-        int lines = lines(field, survey);
         for (int i = 0; i < Math.max(1, lines); i++) {
             Pointer place = field.where().child(i);
             rows.add(new SlotRow(section, field, place, Optional.of(i + 1), List.of(
@@ -144,10 +177,5 @@ final class Slots {
 
     private static Optional<Pointer> last(int line, int lines, Field field) {
         return lines > 0 && line == lines - 1 ? Optional.of(field.where().child(lines)) : Optional.empty();
-    }
-
-    private static int lines(Field field, Branch survey) {
-        return field.answer(survey).filter(Node.Series.class::isInstance)
-                .map(answer -> ((Node.Series) answer).items().size()).orElse(0);
     }
 }

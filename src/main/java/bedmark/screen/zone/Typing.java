@@ -43,9 +43,9 @@ record Typing(Locale locale, Clock clock, Optional<BeltState> beltState) {
     /**
      * Reads the typing of a cell.
      *
-     * @param before the reading that stands in the cell
+     * @param suspect whether the reading that stands in the cell is marked as suspect
      */
-    Read read(ZoneModel.InHand inHand, String typed, Optional<Quantity> before) {
+    Read read(ZoneModel.InHand inHand, String typed, boolean suspect) {
         Slot slot = inHand.slot();
         if (slot instanceof Slot.TextSlot) {
             return new Read(Optional.of(Node.text(typed)), Optional.empty());
@@ -57,20 +57,22 @@ record Typing(Locale locale, Clock clock, Optional<BeltState> beltState) {
         }
         TypedNumber.Accepted accepted = (TypedNumber.Accepted) number;
         return new Read(Optional.of(inHand.unit()
-                .<Node>map(unit -> Branch.write(reading(slot, accepted.in(unit), before)))
+                .<Node>map(unit -> Branch.write(reading(slot, accepted.in(unit), suspect)))
                 .orElseGet(() -> Node.number(accepted.value()))), Optional.empty());
     }
 
-    private Quantity reading(Slot slot, Quantity quantity, Optional<Quantity> before) {
+    private Quantity reading(Slot slot, Quantity quantity, boolean suspect) {
         return slot instanceof Slot.MeasureSlot measured && measured.markable()
-                ? stamped(quantity).withQuality(quality(slot, before)) : quantity;
+                ? stamped(quantity).withQuality(quality(slot, suspect)) : quantity;
     }
 
     /** A depth starts as estimated unless the belt is isolated; other readings as measured; a suspicion stays. */
-    private Quality quality(Slot slot, Optional<Quantity> before) {
+    private Quality quality(Slot slot, boolean suspect) {
+        if (suspect) {
+            return Quality.SUSPECT;
+        }
         boolean isolated = beltState.filter(state -> !state.running()).isPresent();
-        return before.flatMap(Quantity::quality).filter(Quality.SUSPECT::equals)
-                .orElse(isDepth(slot) && !isolated ? Quality.ESTIMATED : Quality.MEASURED);
+        return isDepth(slot) && !isolated ? Quality.ESTIMATED : Quality.MEASURED;
     }
 
     /** The reading with its time and the belt's state. */

@@ -43,6 +43,7 @@ public final class ZoneModel {
     private final UnitChoice unitChoice = new UnitChoice();
     private final Set<Pointer> believed = new HashSet<>();
     private final Judging judging;
+    private final Slots layout;
     private final SurveyInWork work;
     private final Tables tables;
     private final BooleanBinding undoable;
@@ -51,6 +52,7 @@ public final class ZoneModel {
     private final ReadOnlyObjectWrapper<InHand> inHand = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<Outcome> outcome;
     private final ReadOnlyObjectWrapper<Optional<Note>> note = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private Optional<Taken> taken = Optional.empty();
     private final StringProperty typed = new SimpleStringProperty("");
     private final ObjectProperty<UnitSystem> units = new SimpleObjectProperty<>(UnitSystem.METRIC);
     private final ObjectProperty<Locale> locale = new SimpleObjectProperty<>(Locale.ENGLISH);
@@ -64,6 +66,17 @@ public final class ZoneModel {
     public record InHand(Slot slot, Optional<Unit> unit) {
     }
 
+    /** What is typed, and all that decides what it comes to. */
+    private record Typed(Typing typing, InHand inHand, String signs, boolean suspect) {
+        Typing.Read read() {
+            return typing.read(inHand, signs, suspect);
+        }
+    }
+
+    /** What was typed last, and what it came to: a reading keeps the time of its last sign until it is saved. */
+    private record Taken(Typed typed, Typing.Read read) {
+    }
+
     /**
      * Opens a survey.
      *
@@ -74,6 +87,7 @@ public final class ZoneModel {
         this.setting = setting;
         this.companions = setting.assessor().seen(setting.companions());
         this.judging = new Judging(setting);
+        this.layout = new Slots(setting.form());
         this.work = new SurveyInWork(setting.history(), setting.scribe(), setting.person());
         this.tables = new Tables(this, work, setting.last());
         this.units.set(units);
@@ -426,7 +440,7 @@ public final class ZoneModel {
     }
 
     private List<SlotRow> layOut() {
-        return Slots.rows(setting.form(), document(), field -> ways.of(field, document()));
+        return layout.rows(document(), field -> ways.of(field, document()));
     }
 
     private void preview() {
@@ -444,8 +458,17 @@ public final class ZoneModel {
 
     /** What the typing comes to; nothing while nothing is typed. */
     private Typing.Read read() {
-        return typed.get().isEmpty() ? Typing.Read.NOTHING
-                : typing().read(inHand.get(), typed.get(), quantity(document(), active().where()));
+        if (typed.get().isEmpty()) {
+            taken = Optional.empty();
+            return Typing.Read.NOTHING;
+        }
+        boolean suspect = quantity(document(), active().where()).flatMap(Quantity::quality)
+                .filter(Quality.SUSPECT::equals).isPresent();
+        Typed now = new Typed(typing(), inHand.get(), typed.get(), suspect);
+        if (taken.filter(before -> before.typed().equals(now)).isEmpty()) {
+            taken = Optional.of(new Taken(now, now.read()));
+        }
+        return taken.get().read();
     }
 
     private Outcome judge(Branch document) {

@@ -30,6 +30,7 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Instant;
 import java.time.OffsetDateTime;
+import java.time.ZoneId;
 import java.time.ZoneOffset;
 import java.util.List;
 import java.util.Locale;
@@ -43,7 +44,6 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
 class ZoneModelTest {
-    private static final Clock CLOCK = Clock.fixed(Instant.parse("2026-10-01T08:00:00Z"), ZoneOffset.UTC);
     private static final UUID ID = UUID.fromString("00000000-0000-4000-8000-0000000000aa");
     private static final Pointer LENGTH = Pointer.parse("/readings/loadingZoneLength");
     private static final Pointer SPEED = Pointer.parse("/readings/beltSpeed");
@@ -52,6 +52,23 @@ class ZoneModelTest {
     @TempDir
     private Path temp;
 
+    private Instant now = Instant.parse("2026-10-01T08:00:00Z");
+    private final Clock clock = new Clock() {
+        @Override
+        public ZoneId getZone() {
+            return ZoneOffset.UTC;
+        }
+
+        @Override
+        public Clock withZone(ZoneId zone) {
+            throw new UnsupportedOperationException();
+        }
+
+        @Override
+        public Instant instant() {
+            return now;
+        }
+    };
     private final LinkedBlockingQueue<Runnable> screen = new LinkedBlockingQueue<>();
     private Store store;
     private Scribe scribe;
@@ -61,12 +78,12 @@ class ZoneModelTest {
     void openASurvey() throws Exception {
         Bundle bundle = BundleReader.read(Files.readAllBytes(Path.of("sample-surveys/round-under-way.json")));
         FieldForm form = FormReader.read(JsonReader.read(Files.readAllBytes(Path.of("field-forms/loading-zone.json"))));
-        store = Store.open(temp.resolve("store"), StoreOptions.of("tablet").withClock(CLOCK));
+        store = Store.open(temp.resolve("store"), StoreOptions.of("tablet").withClock(clock));
         store.append("A. Vale", new Act.SurveyOpened(ID, Survey.begin(ID, "r", "TP-22", form.id(), form.version(),
-                "A. Vale", OffsetDateTime.now(CLOCK)).document()));
+                "A. Vale", OffsetDateTime.now(clock)).document()));
         scribe = new Scribe(store, screen::add);
         model = new ZoneModel(new ZoneSetting(form, store.history(ID).orElseThrow(), bundle.register(),
-                new Assessor(bundle.register()), List.of(), Optional.empty(), scribe, "A. Vale", CLOCK),
+                new Assessor(bundle.register()), List.of(), Optional.empty(), scribe, "A. Vale", clock),
                 UnitSystem.METRIC, Locale.ENGLISH);
     }
 
@@ -100,6 +117,25 @@ class ZoneModelTest {
     }
 
     @Test
+    void readingIsAsOldAsItsLastSign() throws Exception {
+        type(LENGTH, "4.50");
+        now = now.plusSeconds(60);
+        model.activate(LENGTH);
+        model.typedProperty().set("4.5");
+        now = now.plusSeconds(60);
+        model.typedProperty().set("4.55");
+        OffsetDateTime typed = OffsetDateTime.now(clock);
+        now = now.plusSeconds(60);
+        model.keep();
+        settle();
+        assertEquals(Optional.of(typed), read(LENGTH).at());
+        model.activate(LENGTH);
+        model.typedProperty().set("4.55");
+        assertEquals(Optional.of(OffsetDateTime.now(clock)),
+                ((Branch) model.surveyProperty().get().at(LENGTH).orElseThrow()).asQuantity().at());
+    }
+
+    @Test
     void workBeginsAtTheFirstGap() {
         assertEquals(LENGTH, model.active().where());
     }
@@ -113,7 +149,7 @@ class ZoneModelTest {
         model.next();
         settle();
         assertEquals("4.50", read(LENGTH).value().toPlainString());
-        assertEquals(Optional.of(OffsetDateTime.now(CLOCK)), read(LENGTH).at());
+        assertEquals(Optional.of(OffsetDateTime.now(clock)), read(LENGTH).at());
     }
 
     @Test

@@ -17,6 +17,7 @@ import javafx.scene.control.Label;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.RowConstraints;
 import javafx.scene.layout.StackPane;
 import javafx.scene.text.TextAlignment;
@@ -43,6 +44,8 @@ public final class NumericPad extends StackPane {
     private final PadModel model;
     private final PadWords words;
     private final Map<PadKey, Button> keys = new EnumMap<>(PadKey.class);
+    /** What stands in the place of each key. */
+    private final Map<PadKey, Region> places = new EnumMap<>(PadKey.class);
     private boolean undo;
 
     private final GridPane grid = new GridPane();
@@ -78,9 +81,9 @@ public final class NumericPad extends StackPane {
             List<PadKey> line = rows.get(row);
             for (int column = 0; column < line.size(); column++) {
                 int span = column == line.size() - 1 ? across - column : 1;
-                grid.add(keys.get(line.get(column)), column, row, span, 1);
+                grid.add(places.get(line.get(column)), column, row, span, 1);
                 if (line.get(column) == PadKey.FRACTION) {
-                    grid.add(keys.get(PadKey.SIGN), column, row, span, 1);
+                    grid.add(places.get(PadKey.SIGN), column, row, span, 1);
                 }
             }
             RowConstraints equal = new RowConstraints();
@@ -115,6 +118,9 @@ public final class NumericPad extends StackPane {
             button.getStyleClass().add("primary");
         }
         keys.put(key, button);
+        // Each field puts faces of its own on these: that is no matter of the other keys.
+        places.put(key, key == PadKey.STEP_DOWN || key == PadKey.STEP_UP || key == PadKey.UNIT ? new Island(button)
+                : button);
     }
 
     /** The refusal, on a plate over the upper edge of the keys, where it covers no face of a key. */

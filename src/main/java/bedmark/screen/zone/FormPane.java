@@ -5,6 +5,7 @@ import bedmark.document.Pointer;
 import bedmark.form.Field;
 import bedmark.form.Section;
 import bedmark.screen.Listening;
+import bedmark.screen.part.AfterLayout;
 import bedmark.screen.part.CautionStrip;
 import bedmark.screen.part.FieldBox;
 import bedmark.screen.part.Island;
@@ -50,7 +51,6 @@ final class FormPane extends VBox {
     private boolean upright;
     /** Whether the active row has to be brought in sight once all rows have their places. */
     private boolean revealing;
-    private final Runnable laidOut = this::laidOut;
 
     /** @param large whether large keys take the room: one row is shown, and what is said of it stands elsewhere */
     FormPane(ZoneModel model, Wording wording, Listening listening, boolean large) {
@@ -78,11 +78,8 @@ final class FormPane extends VBox {
             VBox.setVgrow(room, Priority.ALWAYS);
             getChildren().addAll(new Island(header), room, caution);
         }
-        sceneProperty().addListener((property, before, now) -> {
-            Optional.ofNullable(before).ifPresent(scene -> scene.removePostLayoutPulseListener(laidOut));
-            Optional.ofNullable(now).ifPresent(scene -> scene.addPostLayoutPulseListener(laidOut));
-            fill();
-        });
+        AfterLayout.in(this, this::laidOut);
+        sceneProperty().addListener((property, before, now) -> fill());
         // Rows that came in above the active one, or grew, have moved it.
         list.heightProperty().addListener((property, before, now) -> revealing = true);
         listening.to(model.rowsProperty(), this::layOut);

@@ -11,6 +11,7 @@ import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.FootBar;
 import bedmark.screen.part.Island;
 import bedmark.screen.part.RoundTicks;
+import bedmark.screen.part.Steady;
 import bedmark.screen.part.Verdict;
 import bedmark.screen.part.VerdictBlock;
 import bedmark.screen.part.Weight;
@@ -47,6 +48,8 @@ public final class ZoneView implements Screen {
     private final PicturePane picture;
     private final VerdictWords verdictWords;
     private final VerdictBlock verdict;
+    /** A key changes what the verdict says, and seldom how high it is. */
+    private final Steady steady;
     private final VBox work = new VBox();
     private final VBox result = new VBox();
     /** What it comes to takes the room that the form leaves, however much there is to say. */
@@ -73,6 +76,7 @@ public final class ZoneView implements Screen {
         this.picture = new PicturePane(model, wording, density);
         this.verdictWords = new VerdictWords(model.setting().form(), wording);
         this.verdict = new VerdictBlock(List.of(judgedButton(), workingButton()));
+        this.steady = new Steady(verdict);
         this.head = Heads.head(workplace, listening, tag(), title(), beltButton());
         this.foot = footBar();
         compose();
@@ -88,7 +92,7 @@ public final class ZoneView implements Screen {
         work.getChildren().add(model.open() ? entry : completedNote());
         VBox.setVgrow(form, Priority.ALWAYS);
         result.getStyleClass().add("result");
-        result.getChildren().addAll(picture, verdict);
+        result.getChildren().addAll(picture, steady);
         VBox.setVgrow(picture, Priority.ALWAYS);
         entry.listenIn(work);
         body.getStyleClass().add("zone-body");
@@ -167,7 +171,7 @@ public final class ZoneView implements Screen {
 
     private void hideRules() {
         result.getChildren().setAll(form.elsewhere());
-        result.getChildren().addAll(picture, verdict);
+        result.getChildren().addAll(picture, steady);
     }
 
     private FootBar footBar() {

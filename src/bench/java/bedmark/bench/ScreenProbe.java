@@ -84,18 +84,18 @@ public final class ScreenProbe {
         private final int opens;
         private final List<Double> opened = new ArrayList<>();
         private final List<Double> workedForOpening = new ArrayList<>();
-        private final Typist typist;
+        private final int keys;
+        private Optional<Typist> typist = Optional.empty();
         private double workedBefore;
         private long pressed;
         private boolean waiting;
-        private boolean typing;
 
         Person(Workplace workplace, Scene scene, int opens, int keys, CountDownLatch done) {
             this.workplace = workplace;
             this.scene = scene;
             this.opens = opens;
             this.done = done;
-            this.typist = new Typist(scene, keys);
+            this.keys = keys;
             scene.addPostLayoutPulseListener(this::laidOut);
         }
 
@@ -114,8 +114,8 @@ public final class ScreenProbe {
                 return;
             }
             // Looking for a node makes more garbage than a key does, so nothing is looked for while keys are measured.
-            if (typing) {
-                type(now);
+            if (typist.isPresent()) {
+                type(typist.get(), now);
             } else if (scene.lookup("#person") instanceof TextInputControl person) {
                 person.setText("A. Vale");
                 press("caution-read");
@@ -127,11 +127,11 @@ public final class ScreenProbe {
             } else if (scene.lookup("#pad-next") == null) {
                 Optional.ofNullable(scene.lookup(DEPTH)).ifPresent(Node::requestFocus);
             } else {
-                typing = true;
+                typist = Optional.of(new Typist(scene, keys));
             }
         }
 
-        private void type(long now) {
+        private void type(Typist typist, long now) {
             if (typist.typed(now)) {
                 stop();
                 tell("open", opened.stream().skip(WARM_UP).mapToDouble(Double::doubleValue).toArray());
@@ -171,7 +171,10 @@ public final class ScreenProbe {
         }
     }
 
-    /** Adds up what one change costs the screen's thread: the handling itself, then style and layout of its frame. */
+    /**
+     * Adds up what one change costs the screen's thread: the handling itself, then style and layout of its frame, and
+     * what whoever listens for the end of that layout does; so it is made once all of them are there.
+     */
     private static final class Watch {
         private final double[] taken;
         private final double[] worked;

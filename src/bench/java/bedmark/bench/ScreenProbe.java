@@ -89,6 +89,7 @@ public final class ScreenProbe {
         private double workedBefore;
         private long pressed;
         private boolean waiting;
+        private final Runnable laidOut = this::laidOut;
 
         Person(Workplace workplace, Scene scene, int opens, int keys, CountDownLatch done) {
             this.workplace = workplace;
@@ -96,7 +97,6 @@ public final class ScreenProbe {
             this.opens = opens;
             this.done = done;
             this.keys = keys;
-            scene.addPostLayoutPulseListener(this::laidOut);
         }
 
         /** The point is open once its first frame is laid out. */
@@ -159,7 +159,10 @@ public final class ScreenProbe {
                 waiting = true;
                 workedBefore = worked();
                 pressed = System.nanoTime();
+                scene.removePostLayoutPulseListener(laidOut);
                 press("stop-" + POINT);
+                // Behind all that the new screen itself does at the end of a layout.
+                scene.addPostLayoutPulseListener(laidOut);
             }
         }
 

@@ -229,9 +229,7 @@ public record Branch(Members members) implements Node {
         quantity.quality().ifPresent(quality -> members.put("quality", new Text(quality.code())));
         quantity.at().ifPresent(at -> members.put("at", Node.time(at)));
         quantity.beltState().ifPresent(state -> members.put("beltState", new Text(state.code())));
-        Branch written = new Branch(members);
-        written.members.quantity(() -> quantity);
-        return written;
+        return new Branch(members);
     }
 
     private static Refused absent(String key) {

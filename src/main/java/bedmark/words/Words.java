@@ -47,6 +47,7 @@ public final class Words {
      */
     public String text(String key, Object... arguments) {
         MessageFormat text = texts.computeIfAbsent(key, this::read);
+        // Formats may be used by one thread at a time, and reports are told beside the screen.
         synchronized (text) {
             return text.format(arguments);
         }

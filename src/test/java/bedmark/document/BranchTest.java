@@ -12,7 +12,6 @@ import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import java.math.BigDecimal;
 import java.time.OffsetDateTime;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -25,8 +24,6 @@ class BranchTest {
                 Optional.of(new BigDecimal("0.10")), Optional.of(Quality.SUSPECT),
                 Optional.of(OffsetDateTime.parse("2026-03-01T08:30:00+01:00")), Optional.of(BeltState.ISOLATED));
         assertEquals(quantity, Branch.EMPTY.with("depth", quantity).quantity("depth").orElseThrow());
-        Branch readFromAFile = new Branch(new LinkedHashMap<>(Branch.write(quantity).members()));
-        assertEquals(quantity, readFromAFile.asQuantity());
     }
 
     @Test

@@ -5,7 +5,6 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 
 import java.util.Locale;
 import java.util.MissingResourceException;
-import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 
 class WordsTest {
@@ -30,12 +29,5 @@ class WordsTest {
             assertThrows(MissingResourceException.class, () -> words.text("screen.no-such-text"));
             assertThrows(MissingResourceException.class, () -> words.text("nobundle"));
         }
-    }
-
-    @Test
-    void threadsThatTellTheSameTextDoNotMixTheirWords() {
-        Words words = new Words(Locale.ENGLISH);
-        IntStream.range(0, 20_000).mapToObj(Integer::toString).parallel().forEach(line ->
-                assertEquals(line + " \u00B7 side " + line, words.text("screen.zone.line", line, "side " + line)));
     }
 }

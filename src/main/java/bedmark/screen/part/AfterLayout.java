@@ -11,8 +11,10 @@ public final class AfterLayout {
 
     /** Does it in every frame of the scene that the node stands in, for as long as it stands there. */
     public static void in(Node node, Runnable work) {
-        Optional.ofNullable(node.getScene()).ifPresent(scene -> scene.addPostLayoutPulseListener(work));
-        node.sceneProperty().addListener((property, before, now) -> moved(before, now, work));
+        // Another listener of the same frame may have taken the node away.
+        Runnable whileThere = () -> Optional.ofNullable(node.getScene()).ifPresent(scene -> work.run());
+        moved(null, node.getScene(), whileThere);
+        node.sceneProperty().addListener((property, before, now) -> moved(before, now, whileThere));
     }
 
     private static void moved(Scene before, Scene now, Runnable work) {

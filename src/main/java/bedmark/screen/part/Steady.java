@@ -6,11 +6,11 @@ import javafx.scene.layout.Region;
 /**
  * Holds a part that often changes what it says and seldom how high it has to be: what changes in it is laid out again
  * within it, and the screen around it only where the part then wants another height, in the same frame. The part fills
- * it.
+ * it, and takes whatever width there is: were it to ask for more at one word, it would keep it at the next.
  */
 public final class Steady extends Region {
     private final Region held;
-    /** Whether the part was laid out since it was last asked how high it wants to be. */
+    /** Whether the part asked to be laid out since it was last asked how high it wants to be. */
     private boolean changed;
     /** How high it wanted to be when the screen around it was last laid out. */
     private double wanted;
@@ -41,7 +41,7 @@ public final class Steady extends Region {
 
     @Override
     protected double computeMinWidth(double height) {
-        return held.minWidth(height);
+        return 0;
     }
 
     @Override

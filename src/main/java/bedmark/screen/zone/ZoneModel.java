@@ -73,7 +73,7 @@ public final class ZoneModel {
         }
     }
 
-    /** What was typed last, and what it came to: a reading keeps the time of its last sign until it is saved. */
+    /** What was typed last, and what it came to: a reading keeps its time from then until it is saved. */
     private record Taken(Typed typed, Typing.Read read) {
     }
 

@@ -8,8 +8,10 @@ import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Light;
 import java.util.List;
 import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.TimeUnit;
 import java.util.function.Supplier;
 import javafx.application.Platform;
+import javafx.scene.Parent;
 import javafx.scene.Scene;
 import javafx.scene.control.Label;
 import javafx.scene.layout.Region;
@@ -21,7 +23,7 @@ import org.junit.jupiter.api.Test;
 class SteadyTest {
     private static final String SHORT = "Overloaded";
     private static final String AS_SHORT = "Near limit";
-    private static final String LONG = "The bed is deeper than the boards stand high, over the whole of the zone. ".repeat(3);
+    private static final String LONG = "The bed is deeper than the boards stand high, all along the zone. ".repeat(3);
 
     private final Counted around = new Counted();
     private Label words;
@@ -70,8 +72,23 @@ class SteadyTest {
         assertEquals(List.of(before, before), shorter);
     }
 
+    @Test
+    void wordThatIsTooWideLeavesThePartAsWideAsItsRoom() throws Exception {
+        double room = Glass.on(() -> words.getParent().getLayoutBounds().getWidth());
+        Glass.on(() -> {
+            words.setWrapText(false);
+            words.setMinWidth(Region.USE_PREF_SIZE);
+            return null;
+        });
+        assertEquals(room, inTheNextFrame(() -> words.setText(LONG),
+                () -> words.getParent().getLayoutBounds().getWidth()));
+        assertEquals(room, inTheNextFrame(() -> words.setText(SHORT),
+                () -> words.getParent().getLayoutBounds().getWidth()));
+    }
+
     private List<Double> heightAndPlace() {
-        return List.of(words.getParent().prefHeight(words.getParent().getLayoutBounds().getWidth()), below.getLayoutY());
+        Parent held = words.getParent();
+        return List.of(held.prefHeight(held.getLayoutBounds().getWidth()), below.getLayoutY());
     }
 
     @Test
@@ -92,13 +109,17 @@ class SteadyTest {
                 @Override
                 public void run() {
                     scene.removePostLayoutPulseListener(this);
-                    result.complete(seen.get());
+                    try {
+                        result.complete(seen.get());
+                    } catch (RuntimeException e) {
+                        result.completeExceptionally(e);
+                    }
                 }
             });
             change.run();
             Platform.requestNextPulse();
             return null;
         });
-        return result.get();
+        return result.get(20, TimeUnit.SECONDS);
     }
 }

@@ -52,7 +52,7 @@ class ZoneModelTest {
     @TempDir
     private Path temp;
 
-    private Instant now = Instant.parse("2026-10-01T08:00:00Z");
+    private volatile Instant now = Instant.parse("2026-10-01T08:00:00Z");
     private final Clock clock = new Clock() {
         @Override
         public ZoneId getZone() {

@@ -7,7 +7,7 @@ import javafx.scene.layout.Region;
  * Holds a part whose size does not depend on what it says: what changes in it is laid out again within it, and the
  * screen around it is not. The part fills it.
  */
-public final class Island extends Region {
+public class Island extends Region {
     private final Region held;
 
     /** @param held the part; how large it wants to be is asked whenever the surroundings are laid out */

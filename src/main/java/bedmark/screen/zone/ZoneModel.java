@@ -52,7 +52,7 @@ public final class ZoneModel {
     private final ReadOnlyObjectWrapper<InHand> inHand = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<Outcome> outcome;
     private final ReadOnlyObjectWrapper<Optional<Note>> note = new ReadOnlyObjectWrapper<>(Optional.empty());
-    private Optional<Taken> taken = Optional.empty();
+    private final LastTyping lastTyping = new LastTyping();
     private final StringProperty typed = new SimpleStringProperty("");
     private final ObjectProperty<UnitSystem> units = new SimpleObjectProperty<>(UnitSystem.METRIC);
     private final ObjectProperty<Locale> locale = new SimpleObjectProperty<>(Locale.ENGLISH);
@@ -64,17 +64,6 @@ public final class ZoneModel {
      * @param unit the unit in which it is typed, where it has one
      */
     public record InHand(Slot slot, Optional<Unit> unit) {
-    }
-
-    /** What is typed, and all that decides what it comes to. */
-    private record Typed(Typing typing, InHand inHand, String signs, boolean suspect) {
-        Typing.Read read() {
-            return typing.read(inHand, signs, suspect);
-        }
-    }
-
-    /** What was typed last, and what it came to: a reading keeps its time from then until it is saved. */
-    private record Taken(Typed typed, Typing.Read read) {
     }
 
     /**
@@ -459,16 +448,12 @@ public final class ZoneModel {
     /** What the typing comes to; nothing while nothing is typed. */
     private Typing.Read read() {
         if (typed.get().isEmpty()) {
-            taken = Optional.empty();
+            lastTyping.forget();
             return Typing.Read.NOTHING;
         }
         boolean suspect = quantity(document(), active().where()).flatMap(Quantity::quality)
                 .filter(Quality.SUSPECT::equals).isPresent();
-        Typed now = new Typed(typing(), inHand.get(), typed.get(), suspect);
-        if (taken.filter(before -> before.typed().equals(now)).isEmpty()) {
-            taken = Optional.of(new Taken(now, now.read()));
-        }
-        return taken.get().read();
+        return lastTyping.read(typing(), inHand.get(), typed.get(), suspect);
     }
 
     private Outcome judge(Branch document) {

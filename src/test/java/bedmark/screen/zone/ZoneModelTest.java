@@ -29,8 +29,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Instant;
+import java.time.InstantSource;
 import java.time.OffsetDateTime;
-import java.time.ZoneId;
 import java.time.ZoneOffset;
 import java.util.List;
 import java.util.Locale;
@@ -53,22 +53,7 @@ class ZoneModelTest {
     private Path temp;
 
     private volatile Instant now = Instant.parse("2026-10-01T08:00:00Z");
-    private final Clock clock = new Clock() {
-        @Override
-        public ZoneId getZone() {
-            return ZoneOffset.UTC;
-        }
-
-        @Override
-        public Clock withZone(ZoneId zone) {
-            throw new UnsupportedOperationException();
-        }
-
-        @Override
-        public Instant instant() {
-            return now;
-        }
-    };
+    private final Clock clock = ((InstantSource) () -> now).withZone(ZoneOffset.UTC);
     private final LinkedBlockingQueue<Runnable> screen = new LinkedBlockingQueue<>();
     private Store store;
     private Scribe scribe;

@@ -54,9 +54,12 @@ final class DigestStream extends FilterInputStream {
 
     /** Reads to the end and gives the digests (hexadecimal) by the algorithms' names. */
     Map<String, String> finish() throws IOException {
-        byte[] piece = new byte[1 << 16];
-        while (read(piece, 0, piece.length) >= 0) {
-            continue;
+        // Most were read to their end before, and need no room for more.
+        if (read() >= 0) {
+            byte[] piece = new byte[1 << 16];
+            while (read(piece, 0, piece.length) >= 0) {
+                continue;
+            }
         }
         Map<String, String> hex = new LinkedHashMap<>();
         digests.forEach((name, digest) -> hex.put(name, HexFormat.of().formatHex(digest.digest())));

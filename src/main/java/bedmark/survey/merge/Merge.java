@@ -78,6 +78,11 @@ public final class Merge {
     }
 
     private static List<Clash> clashes(List<Copy> visits, List<Copy> held) {
+        Set<UUID> ids = new HashSet<>();
+        if (visits.stream().allMatch(copy -> ids.add(copy.id()) && copy.supersedes().isEmpty())) {
+            // Each is a survey of its own, as nearly all are.
+            return List.of();
+        }
         List<Clash> clashes = new ArrayList<>();
         Map<UUID, List<Copy>> revisions = new TreeMap<>();
         Map<UUID, List<Copy>> corrections = new TreeMap<>();

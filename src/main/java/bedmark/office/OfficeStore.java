@@ -31,6 +31,7 @@ import bedmark.survey.merge.ZoneId;
 import java.io.Closeable;
 import java.io.IOException;
 import java.lang.ref.SoftReference;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.ZonedDateTime;
 import java.util.Collection;
@@ -56,6 +57,9 @@ public final class OfficeStore implements AutoCloseable {
     static final String PACKS = "packs";
     private static final String PASSING = "passing";
     private static final String OFFICE = "office.json";
+    /** What an opening that was cut off may leave, and a key that packs were signed with. */
+    private static final Set<String> BEGUN =
+            Set.of(LOCK, PACKS, PASSING, FolderBooks.JOURNAL, FolderBooks.INDEX, DeviceKey.FILE);
     private static final int JUDGED_AT_ONCE = 500;
 
     private final Path folder;
@@ -97,7 +101,8 @@ public final class OfficeStore implements AutoCloseable {
      * Opens an office store, and makes it where the folder is empty or missing.
      *
      * @throws Refused {@code store-locked} where another program has it open, {@code store-of-tablet} where it is the
-     *                 store of a tablet, {@code store-…} where the folder can't be used
+     *                 store of a tablet, {@code office-folder-other} where it holds anything else, {@code store-…}
+     *                 where it can't be used
      */
     public static OfficeStore open(Path folder, OfficeOptions options) {
         return open(folder, Optional.empty(), options, FolderBooks.INDEX, false);
@@ -154,8 +159,8 @@ public final class OfficeStore implements AutoCloseable {
                                           String index, boolean afresh) {
         FileLayer files = options.files();
         try {
-            if (files.exists(folder.resolve(DeviceFile.NAME)) && !files.exists(folder.resolve(OFFICE))) {
-                throw new Refused(Defect.in(folder.toString(), "store-of-tablet"));
+            if (!files.exists(folder.resolve(OFFICE))) {
+                checkFree(folder, files);
             }
             files.createFolder(folder);
             Closeable lock = files.lock(folder.resolve(LOCK))
@@ -168,6 +173,18 @@ public final class OfficeStore implements AutoCloseable {
             }
         } catch (IOException e) {
             throw new Refused(Fault.defect("store", e, files, folder), e);
+        }
+    }
+
+    /** An office is begun only where nothing else is. */
+    private static void checkFree(Path folder, FileLayer files) throws IOException {
+        if (files.exists(folder.resolve(DeviceFile.NAME))) {
+            throw new Refused(Defect.in(folder.toString(), "store-of-tablet"));
+        } else if (Files.isRegularFile(folder)) {
+            throw new Refused(Defect.in(folder.toString(), "store-is-file"));
+        } else if (files.exists(folder) && files.list(folder).stream().map(file -> file.getFileName().toString())
+                .anyMatch(name -> !BEGUN.contains(name) && !name.startsWith(OFFICE) && !name.startsWith("."))) {
+            throw new Refused(Defect.in(folder.toString(), "office-folder-other"));
         }
     }
 

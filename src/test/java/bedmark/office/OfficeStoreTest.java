@@ -2,9 +2,11 @@ package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
+import bedmark.document.Refused;
 import bedmark.engine.verdict.Level;
 import bedmark.journal.Digest;
 import bedmark.journal.Progress;
@@ -18,6 +20,7 @@ import bedmark.survey.merge.ZoneId;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Clock;
 import java.time.Duration;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
@@ -151,6 +154,39 @@ class OfficeStoreTest {
                 }
             }
             return digests;
+        }
+    }
+
+    @Test
+    void anOfficeIsBegunOnlyWhereNothingElseIs() throws IOException {
+        Path other = Files.createDirectories(folder.resolve("other"));
+        Path file = Files.writeString(other.resolve("plan.txt"), "a plan");
+        Path tablets = Files.createDirectories(folder.resolve("tablets"));
+        Files.writeString(tablets.resolve("device.json"), "{}");
+        assertEquals("office-folder-other", refusal(other));
+        assertEquals("store-is-file", refusal(file));
+        assertEquals("store-of-tablet", refusal(tablets));
+        assertEquals(List.of("plan.txt"), names(other));
+        assertEquals(List.of("device.json"), names(tablets));
+    }
+
+    @Test
+    void anOpeningThatWasCutOffIsBegunAnew() throws IOException {
+        Path office = Files.createDirectories(folder.resolve("office").resolve("packs")).getParent();
+        Files.writeString(office.resolve("store.lock"), "");
+        Files.writeString(office.resolve("office.json.part"), "{");
+        OfficeStore.open(office, OfficeOptions.of(Clock.systemUTC())).close();
+        assertTrue(OfficeStore.isOffice(office));
+    }
+
+    private static String refusal(Path office) {
+        return assertThrows(Refused.class, () -> OfficeStore.open(office, OfficeOptions.of(Clock.systemUTC())))
+                .defect().code();
+    }
+
+    private static List<String> names(Path folder) throws IOException {
+        try (Stream<Path> files = Files.list(folder)) {
+            return files.map(file -> file.getFileName().toString()).toList();
         }
     }
 

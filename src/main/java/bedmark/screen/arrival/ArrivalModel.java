@@ -1,8 +1,5 @@
 package bedmark.screen.arrival;
 
-import bedmark.document.Defect;
-import bedmark.document.Refused;
-import bedmark.journal.Progress;
 import bedmark.office.OfficeOptions;
 import bedmark.office.OfficeStore;
 import bedmark.office.Received;
@@ -15,8 +12,6 @@ import bedmark.screen.office.OfficeDesk;
 import bedmark.screen.office.ReceiveModel;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
-import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.List;
@@ -166,7 +161,7 @@ public final class ArrivalModel implements AutoCloseable {
 
     /**
      * Opens an office and lets it receive the pack. An office is begun where the folder is empty; its own reasons to
-     * refuse are those of {@link OfficeStore#open}, and {@code office-folder-other}.
+     * refuse are those of {@link OfficeStore#open}.
      */
     public void receive(Path folder) {
         Optional<Reception> here = reception.get().filter(open -> open.desk().store().folder()
@@ -176,22 +171,8 @@ public final class ArrivalModel implements AutoCloseable {
             return;
         }
         letGo();
-        errand.run(progress -> open(folder, progress), store -> opened(store, folder));
-    }
-
-    private OfficeStore open(Path folder, Progress progress) {
-        if (!OfficeStore.isOffice(folder) && !isEmpty(folder)) {
-            throw new Refused(Defect.in(folder.toString(), "office-folder-other"));
-        }
-        return OfficeStore.open(folder, OfficeOptions.of(clock).withProgress(progress));
-    }
-
-    private static boolean isEmpty(Path folder) {
-        try (Stream<Path> inside = Files.list(folder)) {
-            return inside.findAny().isEmpty();
-        } catch (IOException e) {
-            throw new Refused(Defect.in(folder.toString(), "folder-absent"), e);
-        }
+        errand.run(progress -> OfficeStore.open(folder, OfficeOptions.of(clock).withProgress(progress)),
+                store -> opened(store, folder));
     }
 
     private void opened(OfficeStore store, Path folder) {

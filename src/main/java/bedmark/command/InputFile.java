@@ -2,6 +2,7 @@ package bedmark.command;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.office.OfficeStore;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -28,6 +29,17 @@ final class InputFile {
     static void requireFolder(Path folder) {
         if (!Files.isDirectory(folder)) {
             throw new Refused(Defect.in(folder.toString(), "folder-absent"));
+        }
+    }
+
+    /**
+     * Refuses an office where a tablet's store is worked on: what would be done to its folder helps nobody.
+     *
+     * @param task the command's name; the sentence says by it what to do instead
+     */
+    static void requireNoOffice(Path folder, String task) {
+        if (OfficeStore.isOffice(folder)) {
+            throw new Refused(Defect.in(folder.toString(), "store-of-office", task));
         }
     }
 

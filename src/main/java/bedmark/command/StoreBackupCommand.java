@@ -35,6 +35,7 @@ final class StoreBackupCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         InputFile.requireFolder(folder);
+        InputFile.requireNoOffice(folder, "backup");
         InputFile.requireFolder(target);
         StoreOptions options = StoreOptions.of("tablet").withClock(surroundings.clock())
                 .withLevels(new LevelWord()::of).withPassphrase(passphrase.of(folder, surroundings));

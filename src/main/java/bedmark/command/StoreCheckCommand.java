@@ -34,6 +34,7 @@ final class StoreCheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        InputFile.requireNoOffice(folder, "check");
         StoreCheck check;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             check = Store.check(folder, FileLayer.disk(), passphrase.of(folder, surroundings), progress::at);

@@ -43,6 +43,7 @@ final class StoreEncryptCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        InputFile.requireNoOffice(folder, "encrypt");
         StoreOptions options = StoreOptions.of("tablet").withClock(surroundings.clock())
                 .withLevels(new LevelWord()::of);
         if (change) {

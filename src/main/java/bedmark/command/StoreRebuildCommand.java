@@ -27,6 +27,7 @@ final class StoreRebuildCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        InputFile.requireNoOffice(folder, "rebuild");
         long entries;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             entries = Store.rebuild(folder, StoreOptions.of("").withClock(surroundings.clock())

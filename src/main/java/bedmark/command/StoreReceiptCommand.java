@@ -47,6 +47,7 @@ final class StoreReceiptCommand implements Callable<Integer> {
     @Override
     public Integer call() throws Exception {
         InputFile.requireFolder(folder);
+        InputFile.requireNoOffice(folder, "receipt");
         Set<Fingerprint> vouched = new HashSet<>();
         for (String typed : trusted) {
             vouched.add(Fingerprint.parse(typed).orElseThrow(() ->

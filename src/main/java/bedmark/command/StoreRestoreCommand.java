@@ -42,6 +42,7 @@ final class StoreRestoreCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         InputFile.requireFolder(backup);
+        InputFile.requireNoOffice(folder, "restore");
         StoreOptions options = StoreOptions.of("tablet").withClock(surroundings.clock())
                 .withLevels(new LevelWord()::of);
         boolean sealed = new StoreFolder(folder, options).sealed();

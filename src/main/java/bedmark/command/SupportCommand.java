@@ -42,6 +42,7 @@ final class SupportCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws IOException {
+        InputFile.requireNoOffice(folder, "support");
         List<String> lines = new ArrayList<>();
         lines.add("bedmark " + ProgramVersion.number());
         for (String property : List.of("java.version", "java.vendor.version", "os.name", "os.version", "os.arch",

@@ -14,6 +14,8 @@ import bedmark.index.SurveyLine;
 import bedmark.index.SurveyQuery;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
+import bedmark.office.OfficeStore;
+import bedmark.office.Offices;
 import bedmark.pack.DeviceKey;
 import bedmark.pack.PackLimits;
 import bedmark.pack.PackReader;
@@ -36,8 +38,11 @@ import java.time.OffsetDateTime;
 import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 import java.util.UUID;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -204,5 +209,42 @@ class StoreCommandsTest {
             WrittenPack sealed = new Dispatch(store).export(surveys, stick, "An estimate.", "A. Vale", Progress.NONE);
             assertEquals(first.sha256(), sealed.sha256(), "encryption changes nothing of what leaves");
         }
+    }
+
+    private static Map<Path, byte[]> held(Path folder) throws IOException {
+        Map<Path, byte[]> held = new TreeMap<>();
+        try (Stream<Path> files = Files.walk(folder)) {
+            for (Path file : files.filter(Files::isRegularFile).toList()) {
+                held.put(file, Files.readAllBytes(file));
+            }
+        }
+        return held;
+    }
+
+    @Test
+    void whatIsDoneToATabletsStoreIsNotDoneToAnOffice() throws IOException {
+        Path office = temp.resolve("office");
+        try (OfficeStore store = Offices.trusting(office, home)) {
+            store.receive(List.of(Offices.pack(Offices.sample("round-2026-03"), home, temp.resolve("a.zip"))), "I",
+                    Progress.NONE);
+        }
+        Map<Path, byte[]> before = held(office);
+        String[][] commands = {{"check", "office check"}, {"rebuild", "office rebuild"}, {"backup", "copy", "--to",
+            stick.toString()}, {"encrypt", "encrypted disk", "--passphrase-file", secret.toString()},
+            {"receipt", "tablet", temp.toString()}};
+        for (String[] command : commands) {
+            List<String> line = new ArrayList<>(List.of("store", command[0], office.toString()));
+            line.addAll(List.of(command).subList(2, command.length));
+            Terminal.Result refused = Terminal.run(line.toArray(String[]::new));
+            assertEquals(3, refused.code(), command[0]);
+            assertEquals(1, refused.err().lines().count(), refused.err());
+            assertTrue(refused.err().contains(command[1]), refused.err());
+        }
+        assertEquals(3, Terminal.run("store", "restore", stick.toString(), "--to", office.toString()).code());
+        assertEquals(3, Terminal.run("support", office.toString(), "--out", temp.resolve("s.txt").toString()).code());
+        Map<Path, byte[]> after = held(office);
+        assertEquals(before.keySet(), after.keySet());
+        before.forEach((file, bytes) -> assertArrayEquals(bytes, after.get(file), file.toString()));
+        assertEquals(0, Terminal.run("office", "check", office.toString()).code());
     }
 }

@@ -138,6 +138,7 @@ class OfficeCommandsTest {
         assertEquals(3, bad.code());
         assertTrue(bad.err().contains("transfers.csv:3 conveyor") && bad.err().contains("transfers.csv:3 skirtSpacing"),
                 bad::err);
+        assertTrue(bad.err().lines().reduce("", (before, line) -> line).contains("Nothing was taken in"), bad::err);
         assertTrue(office("export-register", "--out", folder.resolve("after").toString()).code() == 0);
         assertTrue(Files.readString(folder.resolve("after/transfers.csv")).contains("TP-01"));
         assertTrue(!Files.readString(folder.resolve("after/transfers.csv")).contains("800 mm"));

@@ -1,5 +1,6 @@
 package bedmark.words;
 
+import static org.junit.jupiter.api.Assertions.assertDoesNotThrow;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -20,6 +21,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
 class BundlesTest {
     private static final Pattern PLACEHOLDER = Pattern.compile("\\{\\d");
@@ -50,6 +52,19 @@ class BundlesTest {
             assertEquals(placeholders(english.getProperty(key)), placeholders(spanish.getProperty(key)), key);
             assertFalse(english.getProperty(key).replace("''", "").contains("'"), key);
             assertFalse(spanish.getProperty(key).replace("''", "").contains("'"), key);
+        }
+    }
+
+    /** Defects, judgements and assumptions carry their details as texts; a choice format would fail on those. */
+    @ParameterizedTest
+    @ValueSource(strings = {"defect", "judgement", "assumption"})
+    void whatIsToldOfDetailsTakesThemAsTexts(String bundle) throws IOException {
+        Object[] details = {"TP-01", "one", "two", "three", "four", "five", "six"};
+        for (Locale language : Words.LANGUAGES) {
+            Words words = new Words(language);
+            for (String key : load(bundle).stringPropertyNames()) {
+                assertDoesNotThrow(() -> words.text(bundle + "." + key, details), bundle + "." + key);
+            }
         }
     }
 

@@ -1,5 +1,7 @@
 package bedmark.command;
 
+import bedmark.document.Defect;
+import bedmark.document.Refused;
 import bedmark.office.OfficeStore;
 import bedmark.office.RankQuery;
 import bedmark.quantity.UnitSystem;
@@ -77,15 +79,21 @@ final class OfficeReportCommand implements Callable<Integer> {
         try (ProgressLine progress = new ProgressLine(surroundings);
                 OfficeStore store = desk.open(surroundings, progress)) {
             ReportContent content = ReportContent.of(store, query, OffsetDateTime.now(surroundings.clock()),
-                    progress::at).orElseThrow();
+                    progress::at).orElseThrow(this::stopped);
             ReportOptions options = new ReportOptions(new Wording(words, system), size,
                     (zone, sha256) -> store.photo(zone, sha256), "Bedmark " + ProgramVersion.number(),
                     progress::at);
-            ReportFile.write(out, kind, content, options);
+            if (!ReportFile.write(out, kind, content, options)) {
+                throw stopped();
+            }
             progress.done();
             surroundings.out().println(surroundings.words().text("report.written", out, content.zones().size()));
         }
         return ExitCode.FINE;
+    }
+
+    private Refused stopped() {
+        return new Refused(Defect.in(out.toString(), "report-stopped"));
     }
 
     private Words words(String code) {

@@ -42,26 +42,48 @@ public final class ReportFile {
     /**
      * Writes a report.
      *
-     * @throws Refused {@code report-unwritable}
+     * @return whether it was written; where it was stopped, everything is as before
+     * @throws Refused {@code file-is-folder}, {@code report-unwritable}
      */
-    public static void write(Path out, Kind kind, ReportContent content, ReportOptions options) {
+    public static boolean write(Path out, Kind kind, ReportContent content, ReportOptions options) {
         Path file = out.toAbsolutePath();
+        if (Files.isDirectory(file)) {
+            // An empty folder would give way to the file.
+            throw new Refused(Defect.in(out.toString(), "file-is-folder"));
+        }
         Path part = file.resolveSibling(file.getFileName() + ".part");
         try {
-            try (OutputStream target = new BufferedOutputStream(Files.newOutputStream(part))) {
-                write(kind, content, options, target);
+            OutputStream opened = Files.newOutputStream(part);
+            try {
+                return write(kind, content, options, opened) && moved(part, file);
+            } finally {
+                // Whatever went wrong, no part is left.
+                part.toFile().delete();
             }
-            Files.move(part, file, StandardCopyOption.REPLACE_EXISTING);
         } catch (IOException e) {
-            part.toFile().delete();
             throw new Refused(Defect.in(out.toString(), "report-unwritable"), e);
         }
     }
 
-    private static void write(Kind kind, ReportContent content, ReportOptions options, OutputStream target)
+    private static boolean moved(Path part, Path file) throws IOException {
+        Files.move(part, file, StandardCopyOption.REPLACE_EXISTING);
+        return true;
+    }
+
+    private static boolean write(Kind kind, ReportContent content, ReportOptions options, OutputStream opened)
+            throws IOException {
+        try (OutputStream target = new BufferedOutputStream(opened)) {
+            return set(kind, content, options, target) && !options.progress().cancelled();
+        }
+    }
+
+    /** Sets the report; whether it is whole. */
+    private static boolean set(Kind kind, ReportContent content, ReportOptions options, OutputStream target)
             throws IOException {
         switch (kind) {
-            case PDF -> new PdfReport(content, options).write(target);
+            case PDF -> {
+                return new PdfReport(content, options).write(target);
+            }
             case XLSX -> {
                 ReportTables tables = new ReportTables(content, options);
                 WorkbookFile.write(tables.all(), tables.dictionary(), "1.0", target);
@@ -72,5 +94,6 @@ public final class ReportFile {
                 writer.flush();
             }
         }
+        return true;
     }
 }

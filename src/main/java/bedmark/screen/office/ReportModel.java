@@ -23,7 +23,11 @@ public final class ReportModel {
     private final ObjectProperty<ReportFile.Kind> kind = new SimpleObjectProperty<>(ReportFile.Kind.PDF);
     private final ObjectProperty<Locale> language;
     private final ObjectProperty<PaperSize> paper = new SimpleObjectProperty<>(PaperSize.A4);
-    private final ReadOnlyObjectWrapper<Optional<Path>> written = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final ReadOnlyObjectWrapper<Optional<Outcome>> outcome = new ReadOnlyObjectWrapper<>(Optional.empty());
+
+    /** Where a report was to be written, and whether it was; else it was stopped and everything is as before. */
+    public record Outcome(Path file, boolean written) {
+    }
 
     ReportModel(OfficeDesk desk) {
         this.desk = desk;
@@ -37,14 +41,14 @@ public final class ReportModel {
         PaperSize size = paper.get();
         Path file = folder.resolve("bedmark-" + LocalDate.now(desk.clock()) + "-" + language.get().getLanguage()
                 + wanted.ending());
-        written.set(Optional.empty());
+        outcome.set(Optional.empty());
         desk.ask(progress -> {
             Optional<ReportContent> content = ReportContent.of(desk.store(), RankQuery.ALL,
                     OffsetDateTime.now(desk.clock()), progress);
-            content.ifPresent(one -> ReportFile.write(file, wanted, one, new ReportOptions(wording, size,
-                    desk.store()::photo, wording.text("screen.name"), progress)));
-            return content.map(one -> file);
-        }, written::set);
+            boolean written = content.isPresent() && ReportFile.write(file, wanted, content.get(), new ReportOptions(
+                    wording, size, desk.store()::photo, wording.text("screen.name"), progress));
+            return Optional.of(new Outcome(file, written));
+        }, outcome::set);
     }
 
     public ObjectProperty<ReportFile.Kind> kindProperty() {
@@ -59,8 +63,8 @@ public final class ReportModel {
         return paper;
     }
 
-    /** The file that was written last. */
-    public ReadOnlyObjectProperty<Optional<Path>> writtenProperty() {
-        return written.getReadOnlyProperty();
+    /** What came of the last writing; nothing before the first and while one is under way. */
+    public ReadOnlyObjectProperty<Optional<Outcome>> outcomeProperty() {
+        return outcome.getReadOnlyProperty();
     }
 }

@@ -32,8 +32,9 @@ final class ReportView extends VBox {
         write.setId("report-write");
         Label written = Texts.wrapped("");
         written.setId("report-written");
-        listening.to(model.writtenProperty(), file -> written.setText(file.map(one ->
-                wording.text("office.report.written", one)).orElse("")));
+        listening.to(model.outcomeProperty(), outcome -> written.setText(outcome.map(one -> one.written()
+                ? wording.text("office.report.written", one.file())
+                : wording.text("office.report.stopped", one.file())).orElse("")));
         VBox paper = choice("paper", model.paperProperty(), List.of(PaperSize.values()), PaperSize::code, size ->
                 wording.text("office.report.paper." + size.code()));
         listening.to(model.kindProperty(), kind -> paper.setDisable(kind != ReportFile.Kind.PDF));

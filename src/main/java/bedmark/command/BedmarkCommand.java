@@ -5,6 +5,8 @@ import bedmark.document.Refused;
 import bedmark.wording.Wording;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.LocalDate;
+import java.time.format.DateTimeParseException;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.regex.Pattern;
@@ -14,6 +16,7 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
+import picocli.CommandLine.TypeConversionException;
 
 /** The program's one command and its ways of failing: one sentence on standard error and the right exit code. */
 @Command(name = "bedmark", mixinStandardHelpOptions = true, versionProvider = ProgramVersion.class,
@@ -85,6 +88,7 @@ public final class BedmarkCommand implements Callable<Integer> {
                         .addSubcommand(new StoreRestoreCommand(surroundings))
                         .addSubcommand(new StoreReceiptCommand(surroundings))
                         .addSubcommand(new StoreEncryptCommand(surroundings)))
+                .registerConverter(LocalDate.class, BedmarkCommand::day)
                 .setOut(surroundings.out())
                 .setErr(surroundings.err())
                 .setParameterExceptionHandler(BedmarkCommand::badUse)
@@ -104,6 +108,14 @@ public final class BedmarkCommand implements Callable<Integer> {
             return new FileShowing(surroundings).show(file.get());
         }
         return OpenCommand.open(surroundings, OpenCommand.ownStore(), false);
+    }
+
+    private static LocalDate day(String typed) {
+        try {
+            return LocalDate.parse(typed);
+        } catch (DateTimeParseException e) {
+            throw new TypeConversionException("'" + typed + "' is no day; write it like 2027-01-31");
+        }
     }
 
     private static int badUse(ParameterException failure, String[] arguments) {

@@ -18,7 +18,8 @@ import picocli.CommandLine.Spec;
 
 /** Accepts or shelves a finding, or takes that back. */
 @Command(name = "accept", mixinStandardHelpOptions = true,
-        description = "Accepts or shelves a finding. It comes back when it is worse, or when the day has passed.")
+        description = "Accepts or shelves a finding. It comes back when it is worse, or when the day has passed.",
+        footer = {"", "Exit codes: 0 noted; 2 bad use; 3 no such zone or finding, or unreadable store."})
 final class OfficeAcceptCommand implements Callable<Integer> {
     private final Surroundings surroundings;
 
@@ -54,6 +55,10 @@ final class OfficeAcceptCommand implements Callable<Integer> {
     public Integer call() {
         Rule known = Rule.ofCode(rule).orElseThrow(() ->
                 new ParameterException(spec.commandLine(), "there is no rule '" + rule + "'"));
+        if (reopen && (shelve || until.isPresent())) {
+            throw new ParameterException(spec.commandLine(),
+                    "--reopen takes an answer back; --shelve and --until give one");
+        }
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
             ZoneId zone = OfficeDesk.zone(store, transfer);
@@ -65,10 +70,16 @@ final class OfficeAcceptCommand implements Callable<Integer> {
                         desk.person(), until, LocalDate.now(surroundings.clock()));
             }
             progress.done();
-            surroundings.out().println(surroundings.words().text("office.accept." + (reopen ? "reopened"
-                    : shelve ? "shelved" : "accepted"), transfer, surroundings.words().text("rule." + rule),
-                    until.map(LocalDate::toString).orElse("-")));
+            surroundings.out().println(surroundings.words().text("office.accept." + outcome(), transfer,
+                    surroundings.words().text("rule." + rule), until.map(LocalDate::toString).orElse("")));
         }
         return ExitCode.FINE;
+    }
+
+    private String outcome() {
+        if (reopen) {
+            return "reopened";
+        }
+        return shelve ? "shelved" : until.isPresent() ? "accepted" : "accepted-for-good";
     }
 }

@@ -1,5 +1,6 @@
 package bedmark.command;
 
+import bedmark.engine.verdict.Rule;
 import bedmark.office.Actions;
 import bedmark.office.OfficeStore;
 import bedmark.survey.OfficeDeed;
@@ -7,16 +8,24 @@ import bedmark.survey.merge.ZoneId;
 import java.time.LocalDate;
 import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
 
 /** Writes an action down, changes one, or lists all as CSV. */
 @Command(name = "action", mixinStandardHelpOptions = true,
-        description = "Writes down what is to be done at a transfer point; without one, lists all as CSV.")
+        description = "Writes down what is to be done at a transfer point; without one, lists all as CSV.",
+        footer = {"", "Exit codes: 0 written down or listed; 2 bad use; 3 no such zone or action, or unreadable store."})
 final class OfficeActionCommand implements Callable<Integer> {
     private final Surroundings surroundings;
+
+    @Spec
+    private CommandSpec spec;
 
     @Mixin
     private OfficeDesk desk;
@@ -51,6 +60,13 @@ final class OfficeActionCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        require(transfer.isEmpty() || change.isEmpty(),
+                "TRANSFER adds an action and --change changes one; give one of them");
+        require(transfer.isPresent() || change.isPresent() || !anythingGiven(),
+                "name the TRANSFER that this is to be done at, or the action with --change");
+        require(transfer.isEmpty() || !done, "--done is about an action that is there; name it with --change");
+        finding.filter(code -> !code.isEmpty()).ifPresent(code -> require(Rule.ofCode(code).isPresent(),
+                "--finding knows no rule '" + code + "'"));
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
             Actions actions = new Actions(store);
@@ -69,6 +85,16 @@ final class OfficeActionCommand implements Callable<Integer> {
             progress.done();
             surroundings.out().print(actions.csv());
             return ExitCode.FINE;
+        }
+    }
+
+    private boolean anythingGiven() {
+        return done || due.isPresent() || Stream.of(text, finding, owner, workOrder).anyMatch(Optional::isPresent);
+    }
+
+    private void require(boolean met, String otherwise) {
+        if (!met) {
+            throw new ParameterException(spec.commandLine(), otherwise);
         }
     }
 }

@@ -44,8 +44,9 @@ final class RankText {
             }
             zone.open().forEach(line -> out.println("     - " + Wording.plain(finding(line))));
             zone.answers().forEach(answer -> out.println("     - " + Wording.plain(wording.text(
-                    "office.rank." + answer.answer().code(), wording.text("rule." + answer.rule().code()),
-                    answer.person(), answer.until().map(Object::toString).orElse("-"), answer.reason()))));
+                    "office.rank." + answer.answer().code() + (answer.until().isPresent() ? "" : "-for-good"),
+                    wording.text("rule." + answer.rule().code()), answer.person(),
+                    answer.until().map(Object::toString).orElse(""), answer.reason()))));
             if (zone.clashes() > 0) {
                 out.println("     ! " + wording.text("office.rank.clashes", zone.clashes()));
             }

@@ -43,10 +43,16 @@ public final class Findings {
                 ranked.survey().orElseThrow(), line.document()));
     }
 
-    /** Takes an answer back. */
+    /**
+     * Takes an answer back.
+     *
+     * @throws Refused {@code reason-absent}, {@code person-absent}, {@code answer-absent}
+     */
     public void reopen(ZoneId zone, Rule rule, String reason, String person) {
         require(!reason.isBlank(), zone, "reason-absent");
         require(!person.isBlank(), zone, "person-absent");
+        require(store.ask(tables -> store.minutes(tables).answers(zone)).stream().anyMatch(one -> one.rule() == rule),
+                zone, "answer-absent", rule.code());
         store.act(person, new OfficeDeed.FindingReopened(zone, rule.code(), reason.strip()));
     }
 

@@ -12,6 +12,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -176,5 +177,50 @@ class OfficeCommandsTest {
         Result damaged = Terminal.run("office", "check", office);
         assertEquals(3, damaged.code());
         assertTrue(damaged.err().contains("gone"), damaged::err);
+    }
+
+    @Test
+    void whatIsGivenWithoutAnActionIsNotDropped() {
+        received();
+        for (String[] bad : new String[][] {{"--text", "Renew"}, {"--done"}, {"--finding", "seal-defect"},
+            {"--due", "2027-01-01"}, {"TP-08", "--text", "Renew", "--done"}, {"TP-08", "--change", "a", "--text", "b"},
+            {"TP-08", "--text", "Renew", "--finding", "nope"}}) {
+            List<String> line = new ArrayList<>(List.of("action"));
+            line.addAll(List.of(bad));
+            Result refused = office(line.toArray(String[]::new));
+            assertEquals(2, refused.code(), line.toString());
+            assertEquals(1, refused.err().lines().count(), refused.err());
+            assertEquals("", refused.out());
+        }
+        assertEquals(1, office("action").out().lines().count());
+    }
+
+    @Test
+    void anAnswerIsGivenOrTakenBackAndWhatWasNeverAnsweredIsNot() {
+        received();
+        String[] finding = {"accept", "TP-08", "seal-defect", "--reason", "r"};
+        Result nothing = office(with(finding, "--reopen"));
+        assertEquals(3, nothing.code());
+        assertTrue(nothing.err().contains("nothing to take back"), nothing.err());
+        assertEquals(2, office(with(finding, "--reopen", "--shelve")).code());
+        assertEquals(2, office(with(finding, "--reopen", "--until", "2027-01-01")).code());
+        Result day = office(with(finding, "--until", "tomorrow"));
+        assertEquals(2, day.code());
+        assertTrue(day.err().contains("'tomorrow' is no day") && !day.err().contains("Exception"), day.err());
+    }
+
+    @Test
+    void aFindingThatIsAcceptedForGoodIsToldWithoutADay() {
+        received();
+        String worst = JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8))
+                .root().text("transfer").orElseThrow();
+        String rule = JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8))
+                .root().branches("findings").get(0).text("code").orElseThrow();
+        assertTrue(office("accept", worst, rule, "--reason", "r").out().contains("accepted until it is worse"));
+        assertTrue(office("rank").out().lines().anyMatch(line -> line.endsWith("until it is worse: r")));
+    }
+
+    private static String[] with(String[] line, String... more) {
+        return Stream.concat(Stream.of(line), Stream.of(more)).toArray(String[]::new);
     }
 }

@@ -29,6 +29,9 @@ final class OfficeAcceptCommand implements Callable<Integer> {
     @Mixin
     private OfficeDesk desk;
 
+    @Mixin
+    private ZoneChoice zones;
+
     @Parameters(index = "0", paramLabel = "TRANSFER", description = "The transfer point's id or tag.")
     private String transfer;
 
@@ -61,7 +64,7 @@ final class OfficeAcceptCommand implements Callable<Integer> {
         }
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
-            ZoneId zone = OfficeDesk.zone(store, transfer);
+            ZoneId zone = zones.zone(store, transfer);
             Findings findings = new Findings(store);
             if (reopen) {
                 findings.reopen(zone, known, reason, desk.person());

@@ -30,6 +30,9 @@ final class OfficeActionCommand implements Callable<Integer> {
     @Mixin
     private OfficeDesk desk;
 
+    @Mixin
+    private ZoneChoice zones;
+
     @Parameters(paramLabel = "TRANSFER", arity = "0..1", description = "The transfer point's id or tag.")
     private Optional<String> transfer;
 
@@ -76,7 +79,7 @@ final class OfficeActionCommand implements Callable<Integer> {
                         text.orElse(old.text()), owner.orElse(old.owner()), due.or(old::due),
                         workOrder.orElse(old.workOrder()), done || old.done()), desk.person());
             } else if (transfer.isPresent()) {
-                ZoneId zone = OfficeDesk.zone(store, transfer.get());
+                ZoneId zone = zones.zone(store, transfer.get());
                 progress.done();
                 surroundings.out().println(actions.add(zone, finding.orElse(""), text.orElse(""), owner.orElse(""),
                         due, workOrder.orElse(""), desk.person()));
@@ -89,7 +92,7 @@ final class OfficeActionCommand implements Callable<Integer> {
     }
 
     private boolean anythingGiven() {
-        return done || due.isPresent() || Stream.of(text, finding, owner, workOrder).anyMatch(Optional::isPresent);
+        return done || zones.given() || due.isPresent() || Stream.of(text, finding, owner, workOrder).anyMatch(Optional::isPresent);
     }
 
     private void require(boolean met, String otherwise) {

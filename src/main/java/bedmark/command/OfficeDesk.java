@@ -1,10 +1,7 @@
 package bedmark.command;
 
-import bedmark.document.Defect;
-import bedmark.document.Refused;
 import bedmark.office.OfficeOptions;
 import bedmark.office.OfficeStore;
-import bedmark.survey.merge.ZoneId;
 import java.nio.file.Path;
 import picocli.CommandLine.Option;
 
@@ -34,14 +31,5 @@ final class OfficeDesk {
 
     String person() {
         return person == null ? System.getProperty("user.name", "") : person;
-    }
-
-    /**
-     * The zone that a person named by its id or tag.
-     *
-     * @throws Refused {@code zone-unknown}
-     */
-    static ZoneId zone(OfficeStore store, String named) {
-        return store.zone(named).orElseThrow(() -> new Refused(Defect.in(named, "zone-unknown")));
     }
 }

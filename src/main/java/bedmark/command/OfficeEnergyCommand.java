@@ -14,7 +14,9 @@ import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.Spec;
 
 /** The plant in energy. */
 @Command(name = "energy", mixinStandardHelpOptions = true,
@@ -23,6 +25,9 @@ final class OfficeEnergyCommand implements Callable<Integer> {
     private static final int WIDTH = 30;
 
     private final Surroundings surroundings;
+
+    @Spec
+    private CommandSpec spec;
 
     @Mixin
     private OfficeDesk desk;
@@ -45,7 +50,9 @@ final class OfficeEnergyCommand implements Callable<Integer> {
         List<RankedZone> zones;
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
-            zones = store.rank(RankQuery.ALL.ofPlant(plant), (Progress) progress::at);
+            RankQuery query = RankQuery.ALL.ofPlant(plant);
+            KnownNames.require(spec, store, query);
+            zones = store.rank(query, (Progress) progress::at);
         }
         List<PlantEnergy.Bar> bars = byArea ? PlantEnergy.byArea(zones) : PlantEnergy.byConveyor(zones);
         if (csv) {

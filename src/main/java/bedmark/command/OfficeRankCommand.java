@@ -90,6 +90,7 @@ final class OfficeRankCommand implements Callable<Integer> {
         List<RankedZone> ranked;
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
+            KnownNames.require(spec, store, query);
             ranked = limit.isPresent() ? store.worst(query, limit.get(), progress::at)
                     : store.rank(query, progress::at);
         }

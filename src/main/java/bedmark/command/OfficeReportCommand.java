@@ -78,6 +78,7 @@ final class OfficeReportCommand implements Callable<Integer> {
         RankQuery query = RankQuery.ALL.ofPlant(plant).ofArea(area).staleAfter(Duration.ofDays(staleAfter));
         try (ProgressLine progress = new ProgressLine(surroundings);
                 OfficeStore store = desk.open(surroundings, progress)) {
+            KnownNames.require(spec, store, query);
             ReportContent content = ReportContent.of(store, query, OffsetDateTime.now(surroundings.clock()),
                     progress::at).orElseThrow(this::stopped);
             ReportOptions options = new ReportOptions(new Wording(words, system), size,

@@ -17,6 +17,9 @@ final class OfficeSettleCommand implements Callable<Integer> {
     @Mixin
     private OfficeDesk desk;
 
+    @Mixin
+    private ZoneChoice zones;
+
     @Parameters(index = "0", paramLabel = "TRANSFER", description = "The transfer point's id or tag.")
     private String transfer;
 
@@ -34,7 +37,7 @@ final class OfficeSettleCommand implements Callable<Integer> {
     public Integer call() {
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
-            new Findings(store).settle(OfficeDesk.zone(store, transfer), side, reason, desk.person());
+            new Findings(store).settle(zones.zone(store, transfer), side, reason, desk.person());
             progress.done();
             surroundings.out().println(surroundings.words().text("office.settled", transfer, side));
         }

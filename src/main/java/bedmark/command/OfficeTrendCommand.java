@@ -32,6 +32,9 @@ final class OfficeTrendCommand implements Callable<Integer> {
     @Mixin
     private OfficeDesk desk;
 
+    @Mixin
+    private ZoneChoice zones;
+
     @Parameters(paramLabel = "TRANSFER", description = "The transfer point's id or tag.")
     private String transfer;
 
@@ -52,7 +55,7 @@ final class OfficeTrendCommand implements Callable<Integer> {
                 new ParameterException(spec.commandLine(), "--units is metric or us, not '" + units + "'"));
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
-            ZoneId zone = OfficeDesk.zone(store, transfer);
+            ZoneId zone = zones.zone(store, transfer);
             ZoneTrend trend = store.trend(zone);
             progress.done();
             if (json) {

@@ -434,14 +434,12 @@ public final class OfficeStore implements AutoCloseable {
         return ask(tables -> Results.documents(tables, digests));
     }
 
-    /** The zone with that id, or with that tag where there is one alone. */
-    public Optional<ZoneId> zone(String named) {
+    /** The zones with that id, of several plants maybe; those with that tag where none has. */
+    public List<ZoneNames> zonesNamed(String named) {
         List<ZoneNames> zones = ask(OfficeTables::zones).stream().map(zone -> zone.row().names()).toList();
         List<ZoneNames> exact = zones.stream().filter(one -> one.zone().key().equals(named)
                 || one.zone().transfer().equals(named)).toList();
-        List<ZoneNames> found = exact.isEmpty() ? zones.stream().filter(one -> one.tag().equals(named)).toList()
-                : exact;
-        return found.size() == 1 ? Optional.of(found.get(0).zone()) : Optional.empty();
+        return exact.isEmpty() ? zones.stream().filter(one -> one.tag().equals(named)).toList() : exact;
     }
 
     /** The register that holds today, by plant. */

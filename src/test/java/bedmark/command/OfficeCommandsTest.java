@@ -223,4 +223,41 @@ class OfficeCommandsTest {
     private static String[] with(String[] line, String... more) {
         return Stream.concat(Stream.of(line), Stream.of(more)).toArray(String[]::new);
     }
+
+    @Test
+    void whatNoRegisterHoldsIsRefusedNamingWhatItHolds() {
+        received();
+        for (String[] bad : new String[][] {{"rank", "--plant", "nope"}, {"rank", "--area", "nope"},
+            {"rank", "--material", "nope"}, {"energy", "--plant", "nope"},
+            {"report", "--area", "nope", "--out", folder.resolve("r.pdf").toString()},
+            {"report", "--plant", "nope", "--out", folder.resolve("r.pdf").toString()}}) {
+            Result refused = office(bad);
+            assertEquals(2, refused.code(), String.join(" ", bad));
+            assertEquals("", refused.out());
+            assertTrue(refused.err().contains("knows no 'nope'; known: "), refused.err());
+        }
+        assertTrue(office("rank", "--plant", "nope").err().contains("ostermere"));
+        assertTrue(office("rank", "--area", "nope").err().contains("Biomass yard"));
+        assertTrue(Files.notExists(folder.resolve("r.pdf")));
+    }
+
+    @Test
+    void aZoneThatTwoPlantsHaveIsNamedWithItsPlant() {
+        received();
+        String tables = folder.resolve("tables").toString();
+        assertEquals(0, office("export-register", "--out", tables).code());
+        Result second = office("import-register", tables, "--plant", "westerly");
+        assertEquals(0, second.code(), second::err);
+        for (String[] line : new String[][] {{"trend", "TP-08"}, {"action", "TP-08", "--text", "Renew the seals"},
+            {"accept", "TP-08", "seal-defect", "--reason", "r"}, {"settle", "TP-08", "abc", "--reason", "r"}}) {
+            Result unclear = office(line);
+            assertEquals(3, unclear.code(), line[0]);
+            assertTrue(unclear.err().contains("ostermere") && unclear.err().contains("westerly"), unclear.err());
+            assertEquals(2, office(with(line, "--plant", "nope")).code(), line[0]);
+        }
+        assertEquals(0, office("trend", "TP-08", "--plant", "ostermere").code());
+        assertEquals(0, office("action", "TP-08", "--text", "Renew", "--plant", "westerly").code());
+        assertTrue(office("action").out().contains(",westerly,TP-08,"));
+        assertEquals(2, office("action", "--plant", "westerly").code());
+    }
 }

@@ -89,7 +89,8 @@ public sealed interface OfficeDeed {
      * @param reason  why; never blank
      * @param until   the last day on which it stays away; nothing for as long as it is not worse
      * @param survey  the content that it was answered for
-     * @param before  how it stood then: {@code level}, {@code observed} and {@code standardUncertainty}
+     * @param before  how it stood then: {@code level}, {@code observed} and {@code standardUncertainty} of the worse of
+     *                both feeds, and the same of each in {@code today} and {@code atDesignFeed}
      */
     record FindingAnswered(ZoneId zone, String finding, Answer answer, String reason, Optional<LocalDate> until,
                            String survey, Branch before) implements OfficeDeed {

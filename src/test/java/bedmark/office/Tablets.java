@@ -3,6 +3,7 @@ package bedmark.office;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.survey.Bundle;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.time.OffsetDateTime;
@@ -31,6 +32,13 @@ final class Tablets {
 
     Tablets(long seed) {
         random = new Random(seed);
+    }
+
+    /** A survey made once more at noon of another day, as a first revision. */
+    static Branch fresh(Branch survey, String day) {
+        return survey.without("supersedes").without("photos").with("revision", Node.number(1))
+                .with("id", UUID.nameUUIDFromBytes(day.getBytes(StandardCharsets.UTF_8)).toString())
+                .with("startedAt", day + "T12:00:00+01:00").with("completedAt", day + "T12:20:00+01:00");
     }
 
     Path key(Path folder, int tablet) {

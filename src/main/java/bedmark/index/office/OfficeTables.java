@@ -22,7 +22,7 @@ import java.util.function.Supplier;
 public final class OfficeTables implements AutoCloseable {
 
     /** The version of the tables: the number of the last migration. */
-    static final String SCHEMA = "5";
+    static final String SCHEMA = "6";
     private static final String DEED = "insert into deed (seq, made_at, person, device, code, payload) "
             + "values (?, ?, ?, ?, ?, ?)";
     private static final String MOVED = "update survey set made = ?, register = ?, conveyor = ?, drive = ? "

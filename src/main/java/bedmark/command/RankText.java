@@ -66,6 +66,8 @@ final class RankText {
                 wording.format().computed(saving.wh() / 1e6, 1))));
         zone.age().ifPresent(age -> facts.add(wording.text(zone.stale() ? "office.rank.stale" : "office.rank.age",
                 age.toDays())));
+        zone.surveyed().filter(at -> zone.age().isEmpty()).ifPresent(at -> facts.add(wording.text("office.rank.ahead",
+                at.toString())));
         zone.visitStatus().filter(status -> status != InspectionStatus.INSPECTED).ifPresent(status ->
                 facts.add(wording.text("office.rank.visit." + status.code())));
         return facts;

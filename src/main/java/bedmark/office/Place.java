@@ -8,7 +8,7 @@ public enum Place {
     INCOMPLETE("incomplete"),
     /** Never inspected, or not on the last visit. */
     NOT_INSPECTED("not-inspected"),
-    /** Nothing bad was found, but that was too long ago to count. */
+    /** Nothing bad was found, but that was too long ago to count, or nobody knows how long. */
     STALE("stale"),
     NEAR("near"),
     WITHIN("within");

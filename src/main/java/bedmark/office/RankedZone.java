@@ -19,8 +19,8 @@ import java.util.OptionalDouble;
  *                    was never inspected or can't be judged
  * @param survey      digest of the content that it is judged by
  * @param surveyed    when that was completed
- * @param age         since then; never negative
- * @param stale       whether that is too long ago to count
+ * @param age         since then; never negative; nothing where a wrong clock dated it ahead
+ * @param stale       whether that is too long ago to count, or nobody knows how long
  * @param visitStatus what came of the last visit; nothing where there was none
  * @param visited     when that was
  * @param driveShare  drive power of the zone as a share of the rated power, 0–1
@@ -32,7 +32,7 @@ import java.util.OptionalDouble;
  * @param findings    what is not within its limits
  * @param answers     the findings among them that were accepted or shelved and stay away
  * @param clashes     contents that can't all be right, and wait for a person
- * @param clockWrong  whether a tablet's clock can't have been right
+ * @param clockWrong  whether a tablet's clock can't have been right: out of order, or ahead of the office's by days
  */
 public record RankedZone(ZoneNames names, Place place, Optional<Level> level, Optional<String> survey,
                          Optional<Instant> surveyed, Optional<Duration> age, boolean stale,

@@ -32,6 +32,8 @@ final class Ranking {
     /** From so many on it pays to share the work among the processors. */
     private static final int MANY = 10_000;
     private static final double UNKNOWN = -1;
+    /** A clock may be ahead of the office's by so much: that of a tablet in another zone of time, or set by hand. */
+    private static final Duration AHEAD = Duration.ofDays(1);
     private static final Comparator<Ordered> BY_NUMBERS =
             Comparator.comparingDouble(Ordered::driveShare).thenComparingDouble(Ordered::saving).reversed();
     private static final Comparator<Ordered> WORST_FIRST =
@@ -155,7 +157,7 @@ final class Ranking {
             case OVERLOADED -> Place.OVERLOADED;
             case UNDECIDED -> Place.UNDECIDED;
             case INCOMPLETE -> Place.INCOMPLETE;
-            case NEAR, WITHIN -> !gist.inspected() ? Place.NOT_INSPECTED : stale(age(instant(gist.moment()))) ? Place.STALE
+            case NEAR, WITHIN -> !gist.inspected() ? Place.NOT_INSPECTED : stale(instant(gist.moment())) ? Place.STALE
                     : open == Level.NEAR ? Place.NEAR : Place.WITHIN;
         };
     }
@@ -172,11 +174,13 @@ final class Ranking {
         Optional<Instant> surveyed = instant(standing.moment());
         Optional<Instant> visited = standing.visited().equals(standing.moment()) ? surveyed
                 : instant(standing.visited());
-        Optional<Duration> age = age(surveyed);
-        return new RankedZone(row.names(), ordered.place, level, standing.latest(), surveyed, age, stale(age),
+        boolean clockWrong = standing.clockWrong() || surveyed.filter(this::ahead).isPresent()
+                || visited.filter(this::ahead).isPresent();
+        return new RankedZone(row.names(), ordered.place, level, standing.latest(), surveyed, age(surveyed),
+                stale(surveyed),
                 standing.visitStatus(), visited, verdict.driveShare(), verdict.skirtPower(), verdict.energyWh(),
                 verdict.cost(), verdict.co2(), verdict.energyKind(), verdict.currency(), saving(verdict),
-                FindingLine.read(verdict.findings()), ordered.held, standing.clashes(), standing.clockWrong());
+                FindingLine.read(verdict.findings()), ordered.held, standing.clashes(), clockWrong);
     }
 
     private static Optional<Saving> saving(Verdict verdict) {
@@ -185,13 +189,20 @@ final class Ranking {
                 verdict.savingCost(), verdict.savingCo2())) : Optional.empty();
     }
 
-    /** Never negative. */
-    private Optional<Duration> age(Optional<Instant> surveyed) {
-        return surveyed.map(at -> at.isAfter(now) ? Duration.ZERO : Duration.between(at, now));
+    /** Whether a day lies ahead that no clock can be right about. */
+    private boolean ahead(Instant moment) {
+        return moment.isAfter(now.plus(AHEAD));
     }
 
-    private boolean stale(Optional<Duration> age) {
-        return age.isPresent() && age.get().compareTo(query.staleAfter()) > 0;
+    /** Never negative. */
+    private Optional<Duration> age(Optional<Instant> surveyed) {
+        return surveyed.filter(at -> !ahead(at))
+                .map(at -> at.isAfter(now) ? Duration.ZERO : Duration.between(at, now));
+    }
+
+    /** Nobody knows how old a result is that a wrong clock dated ahead. */
+    private boolean stale(Optional<Instant> surveyed) {
+        return surveyed.isPresent() && age(surveyed).filter(age -> age.compareTo(query.staleAfter()) <= 0).isEmpty();
     }
 
     private static Optional<Instant> instant(OptionalLong moment) {

@@ -55,8 +55,9 @@ final class ZoneLists {
 
     private List<Grid.Cell> row(ReportZone zone) {
         Place place = zone.ranked().place();
-        String reason = place == Place.STALE ? words.text("report.stale",
-                zone.ranked().age().map(age -> Long.toString(age.toDays())).orElse("–"))
+        String reason = place == Place.STALE ? zone.ranked().age()
+                .map(age -> words.text("report.stale", Long.toString(age.toDays())))
+                .orElseGet(() -> words.text("report.ahead"))
                 : zone.visit().map(words::status).orElseGet(() -> words.text("report.never"));
         return List.of(Grid.Cell.of(zone.tag()).bold().then(zone.way()), Grid.Cell.of(zone.ranked().names().area()),
                 Grid.Cell.of(words.place(place)).with(new LevelSign(place, 10)), Grid.Cell.of(reason),

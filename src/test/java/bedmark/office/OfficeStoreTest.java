@@ -90,6 +90,31 @@ class OfficeStoreTest {
     }
 
     @Test
+    void aSurveyThatAFastClockDatedAheadIsNeverHealthyAndNamesTheClock() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
+            store.receive(packOf("round-2026-03"), "Ida Marsh");
+            RankedZone healthy = store.rank().stream().filter(zone -> zone.place() == Place.WITHIN).findFirst()
+                    .orElseThrow();
+            Branch survey = bundle.document().branches("surveys").stream().filter(one -> one.text("transfer")
+                    .equals(Optional.of(healthy.zone().transfer()))).findFirst().orElseThrow();
+            assertEquals(Place.WITHIN, received(store, bundle, survey, "2026-10-01", healthy.zone()).place());
+            RankedZone ahead = received(store, bundle, survey, "2036-03-18", healthy.zone());
+            assertEquals(Place.STALE, ahead.place());
+            assertEquals(Optional.of(Level.WITHIN), ahead.level());
+            assertTrue(ahead.stale());
+            assertTrue(ahead.clockWrong());
+            assertEquals(Optional.empty(), ahead.age());
+        }
+    }
+
+    private RankedZone received(OfficeStore store, Bundle bundle, Branch survey, String day, ZoneId zone) {
+        store.receive(Offices.pack(Offices.with(bundle, day, day + "T14:00:00+01:00",
+                List.of(Tablets.fresh(survey, day))), tablet(), folder.resolve(day + ".zip")), "Ida Marsh");
+        return store.ranked(zone).orElseThrow();
+    }
+
+    @Test
     void theHeadOfTheListIsReadAloneAndIsTheSame() {
         try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
             store.receive(packOf("round-2026-03"), "Ida Marsh");

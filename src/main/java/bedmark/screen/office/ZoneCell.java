@@ -139,7 +139,7 @@ final class ZoneCell extends ListCell<RankedZone> {
             return wording.text("office.worst.visit." + zone.visitStatus().get().code());
         }
         return zone.age().map(age -> wording.text("office.worst.days", age.toDays()))
-                .orElse(wording.text("office.worst.never"));
+                .orElse(wording.text(zone.surveyed().isPresent() ? "office.worst.ahead" : "office.worst.never"));
     }
 
     private static Label label(String styleClass, String text) {

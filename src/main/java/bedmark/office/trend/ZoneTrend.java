@@ -13,7 +13,7 @@ import java.util.Set;
  * A loading zone over time.
  *
  * @param series   each measure that any survey tells
- * @param changes  what is not as it was on the survey before, in time order
+ * @param changes  what is not as it was before, in time order
  * @param interval how often the zone should be looked at
  */
 public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, Interval interval) {
@@ -29,10 +29,7 @@ public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, 
      * @param replaced results in whose place others stand
      */
     public static ZoneTrend of(ZoneId zone, List<JudgedZone> counted, List<JudgedZone> replaced) {
-        List<Change> changes = new ArrayList<>();
-        for (int i = 1; i < counted.size(); i++) {
-            changes.addAll(Change.between(counted.get(i - 1), counted.get(i)));
-        }
+        List<Change> changes = Regimes.changes(counted);
         List<Series> series = new ArrayList<>();
         for (Measure measure : Measure.values()) {
             List<Observation> observations = new ArrayList<>();

@@ -15,6 +15,7 @@ import bedmark.survey.Survey;
 import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Origin;
 import bedmark.survey.merge.ZoneId;
+import java.math.BigDecimal;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
 import java.util.ArrayList;
@@ -22,6 +23,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.UUID;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 
 /** One loading zone over time, from surveys that are judged as any other. */
@@ -111,6 +113,69 @@ class ZoneTrendTest {
         ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of());
         assertEquals(List.of(Change.Kind.SPEED, Change.Kind.SEALS, Change.Kind.SEALS, Change.Kind.BOARDS),
                 trend.changes().stream().map(Change::kind).toList());
+    }
+
+    private static List<Change> changes(List<JudgedZone> zones) {
+        return ZoneTrend.of(ZONE, zones, List.of()).changes();
+    }
+
+    private static List<JudgedZone> months(List<String> readings) {
+        List<JudgedZone> zones = new ArrayList<>();
+        for (String more : readings) {
+            zones.add(survey(LocalDate.of(2025, 1, 1).plusMonths(zones.size()), 120, more));
+        }
+        return zones;
+    }
+
+    @Test
+    void aTapeThatIsLaidAgainChangesNoBoardAndNoSeal() {
+        assertEquals(List.of(), changes(months(Stream.of(800, 798, 803, 799, 801, 802, 798, 803)
+                .map(spacing -> ",'skirtSpacing':{'value':" + spacing + ",'unit':'mm'}").toList())));
+        assertEquals(List.of(), changes(months(Stream.of("2.00", "1.97", "2.01", "1.98").map(ZoneTrendTest::worn)
+                .toList())));
+    }
+
+    @Test
+    void aReadingThatIsMoreCertainTellsASmallerChange() {
+        String exact = ",'skirtSpacing':{'value':%s,'unit':'mm','standardUncertainty':0.5}";
+        assertEquals(List.of(), changes(months(List.of(exact.formatted("800"), exact.formatted("804")))));
+        assertEquals(1, changes(months(List.of(exact.formatted("800"), exact.formatted("806")))).size());
+    }
+
+    private static String worn(String metres) {
+        return ",'seals':[{'side':'left','type':'vertical','condition':'sound','length':{'value':"
+                + new BigDecimal("6").subtract(new BigDecimal(metres)) + ",'unit':'m'}},{'side':'left',"
+                + "'type':'vertical','condition':'worn','length':{'value':" + metres + ",'unit':'m'}},"
+                + "{'side':'right','type':'vertical','condition':'sound','length':{'value':6,'unit':'m'}}]";
+    }
+
+    @Test
+    void sealsThatWearSlowlyAndAreRenewedInPartSayHowMuch() {
+        List<Change> changes = changes(months(Stream.of("0.50", "1.50", "2.50", "1.90", "0.40")
+                .map(ZoneTrendTest::worn).toList()));
+        assertEquals(1, changes.size());
+        assertEquals(Change.Kind.SEALS, changes.get(0).kind());
+        assertEquals("vertical:sound vertical:worn 21 %", changes.get(0).from());
+        assertEquals("vertical:sound vertical:worn 3 %", changes.get(0).to());
+    }
+
+    @Test
+    void aSpeedThatCreepsIsMarkedWhereItComesToAChange() {
+        List<Change> changes = changes(months(Stream.of("2.00", "2.08", "2.16", "2.24", "2.32", "2.40")
+                .map(speed -> ",'beltSpeed':{'value':" + speed + ",'unit':'m/s'}").toList()));
+        assertEquals(List.of("2.0 2.16", "2.16 2.32"), changes.stream().map(one -> one.from() + " " + one.to())
+                .toList());
+    }
+
+    @Test
+    void aMaterialThatIsRenamedIsTheSame() {
+        List<JudgedZone> zones = new ArrayList<>(months(List.of("", "")));
+        Branch plant = REGISTER.document();
+        Register renamed = new Register(plant.with("materials", new Node.Series(plant.branches("materials").stream()
+                .map(material -> (Node) material.with("name", "another name")).toList())));
+        JudgedZone last = zones.get(1);
+        zones.set(1, new JudgedZone(last.zone(), last.copy(), last.survey(), renamed, last.assessment()));
+        assertEquals(List.of(), changes(zones));
     }
 
     @Test

@@ -382,12 +382,6 @@ public final class OfficeStore implements AutoCloseable {
                 copy -> today.register()).stream().min(Judge.WORST_FIRST)));
     }
 
-    /** All results of a zone that count, in time order, each by the register that it was made with. */
-    public List<JudgedZone> history(ZoneId zone) {
-        return ask(tables -> results.judged(tables, Merge.zone(zone, tables.copies(List.of(zone)),
-                minutes(tables).setAside()).results(), copy -> copy.origin().register()));
-    }
-
     /** The bytes of a photo of a survey; nothing where no pack holds it. */
     public Optional<byte[]> photo(JudgedZone zone, String sha256) {
         return desk.call(() -> books.ask(() -> books.tables().packOf(zone.copy().digest())).flatMap(pack ->
@@ -396,13 +390,7 @@ public final class OfficeStore implements AutoCloseable {
 
     /** A zone over time. */
     public ZoneTrend trend(ZoneId zone) {
-        List<JudgedZone> counted = history(zone);
-        Set<String> digests = new HashSet<>();
-        counted.forEach(one -> digests.add(one.copy().digest()));
-        List<JudgedZone> replaced = ask(tables -> results.judged(tables, tables.copies(List.of(zone)).stream()
-                .filter(copy -> copy.result() && !digests.contains(copy.digest())).toList(),
-                copy -> copy.origin().register()));
-        return ZoneTrend.of(zone, counted, replaced);
+        return ask(tables -> results.trend(tables, zone));
     }
 
     /** Contents with what the flat table tells of them, in the order of the digests. */

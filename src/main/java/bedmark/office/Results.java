@@ -2,7 +2,9 @@ package bedmark.office;
 
 import bedmark.index.office.OfficeTables;
 import bedmark.json.JsonReader;
+import bedmark.office.trend.ZoneTrend;
 import bedmark.survey.Survey;
+import bedmark.survey.merge.Clash;
 import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Merge;
 import bedmark.survey.merge.MergedZone;
@@ -36,6 +38,32 @@ final class Results {
         zones.forEach(zone -> judged.put(zone, new ArrayList<>()));
         judged(tables, sides, copy -> copy.origin().register()).forEach(one -> judged.get(one.zone()).add(one));
         return judged;
+    }
+
+    /**
+     * A zone over time. Of contents that clash the worst counts, as it does in the list: they are one survey, and two
+     * points of it would be a trend of its own.
+     */
+    ZoneTrend trend(OfficeTables tables, ZoneId zone) {
+        List<Copy> copies = tables.copies(List.of(zone));
+        MergedZone merged = Merge.zone(zone, copies, minutes.apply(tables).setAside());
+        List<Copy> results = merged.results();
+        List<JudgedZone> counted = judged(tables, results, copy -> copy.origin().register());
+        List<JudgedZone> replaced = judged(tables, copies.stream().filter(copy -> copy.result()
+                && results.stream().noneMatch(one -> one.digest().equals(copy.digest()))).toList(),
+                copy -> copy.origin().register());
+        return ZoneTrend.of(zone, oneSide(counted, merged.clashes()), replaced, merged.clashes().size());
+    }
+
+    private static List<JudgedZone> oneSide(List<JudgedZone> judged, List<Clash> clashes) {
+        List<JudgedZone> kept = new ArrayList<>();
+        judged.stream().sorted(Judge.WORST_FIRST).forEach(one -> {
+            if (kept.stream().noneMatch(worse -> clashes.stream().anyMatch(clash -> clash.has(one.copy())
+                    && clash.has(worse.copy())))) {
+                kept.add(one);
+            }
+        });
+        return judged.stream().filter(kept::contains).toList();
     }
 
     /** Contents, judged by the register that is named for each; those that can't be are left out. */

@@ -55,11 +55,14 @@ public final class TrendTelling {
         return lines.stream().map(String::strip).toList();
     }
 
-    /** What changed, how often to look, and how the latest result is judged. */
+    /** What changed, what waits for a person, how often to look, and how the latest result is judged. */
     public List<String> around(ZoneTrend trend, Optional<JudgedZone> own, Optional<JudgedZone> today) {
         List<String> lines = new ArrayList<>();
         trend.changes().forEach(change -> say(lines, "", "office.trend.change." + change.kind().code(),
                 change.at().atZone(ZoneOffset.UTC).toLocalDate(), change.from(), change.to()));
+        if (trend.clashes() > 0) {
+            say(lines, "", "office.trend.clashes", trend.clashes());
+        }
         say(lines, "", "office.interval." + trend.interval().reason().code(), trend.interval().days(),
                 wording.format().computed(trend.interval().pfDays().orElse(0), 0));
         if (own.isPresent()) {

@@ -10,6 +10,7 @@ import bedmark.document.Refused;
 import bedmark.engine.verdict.Level;
 import bedmark.journal.Digest;
 import bedmark.journal.Progress;
+import bedmark.office.trend.Outlook;
 import bedmark.survey.OfficeDeed;
 import java.util.Optional;
 import bedmark.survey.Assessor;
@@ -255,9 +256,15 @@ class OfficeStoreTest {
             assertEquals(2, clash.sides().size());
             ZoneId zone = clash.sides().get(0).zone();
             assertEquals(1, store.ranked(zone).orElseThrow().clashes());
+            assertEquals(1, store.trend(zone).clashes());
+            store.trend(zone).series().forEach(series -> {
+                assertEquals(1, series.observations().size(), "two sides are one survey");
+                assertEquals(new Outlook.TooFew(1, 5), series.outlook());
+            });
             store.act("Ida Marsh", new OfficeDeed.ClashSettled(zone,
                     List.of(clash.sides().get(1).digest()), "the first one was signed off"));
             assertEquals(0, store.ranked(zone).orElseThrow().clashes());
+            assertEquals(0, store.trend(zone).clashes());
             assertEquals(clash.sides().get(0).digest(), store.ranked(zone).orElseThrow().survey().orElseThrow());
         }
     }

@@ -21,7 +21,8 @@ public final class TrendDocument {
                         .with("at", change.at().toString()).with("from", change.from()).with("to", change.to())))
                 .with("interval", number(Branch.EMPTY.with("days", Node.number(trend.interval().days()))
                         .with("because", trend.interval().reason().code()), "daysFromNearToOverloaded",
-                        trend.interval().pfDays()));
+                        trend.interval().pfDays()))
+                .with("clashes", Node.number(trend.clashes()));
     }
 
     /** The unit that a measure's values carry. */

@@ -15,8 +15,9 @@ import java.util.Set;
  * @param series   each measure that any survey tells
  * @param changes  what is not as it was before, in time order
  * @param interval how often the zone should be looked at
+ * @param clashes  surveys whose sides clash and wait for a person; of each the worst side is told
  */
-public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, Interval interval) {
+public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, Interval interval, int clashes) {
     public ZoneTrend {
         series = List.copyOf(series);
         changes = List.copyOf(changes);
@@ -25,10 +26,11 @@ public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, 
     /**
      * Follows a zone.
      *
-     * @param counted  the results that count, in time order
+     * @param counted  the results that count, in time order; of one survey no more than one
      * @param replaced results in whose place others stand
+     * @param clashes  conflicts that wait for a person
      */
-    public static ZoneTrend of(ZoneId zone, List<JudgedZone> counted, List<JudgedZone> replaced) {
+    public static ZoneTrend of(ZoneId zone, List<JudgedZone> counted, List<JudgedZone> replaced, int clashes) {
         List<Change> changes = Regimes.changes(counted);
         List<Series> series = new ArrayList<>();
         for (Measure measure : Measure.values()) {
@@ -46,7 +48,7 @@ public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, 
         Interval interval = series.stream().filter(one -> one.measure() == Measure.DEPTH).findFirst()
                 .map(Interval::of).orElse(new Interval(Interval.MOST, Interval.Reason.TOO_FEW,
                         OptionalDouble.empty()));
-        return new ZoneTrend(zone, series, changes, interval);
+        return new ZoneTrend(zone, series, changes, interval, clashes);
     }
 
     private static void observe(Measure measure, JudgedZone zone, boolean replaced, List<Observation> into) {

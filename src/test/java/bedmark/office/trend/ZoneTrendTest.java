@@ -63,7 +63,7 @@ class ZoneTrendTest {
 
     @Test
     void aRisingBedSaysWhenItWillBeOverloaded() {
-        ZoneTrend trend = ZoneTrend.of(ZONE, rising(8), List.of());
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(8), List.of(), 0);
         Series depth = depth(trend);
         assertEquals(0.22, depth.near().getAsDouble(), 1e-12);
         assertEquals(0.25, depth.overloaded().getAsDouble(), 1e-12);
@@ -82,7 +82,7 @@ class ZoneTrendTest {
 
     @Test
     void fourSurveysAreTooFewToSay() {
-        ZoneTrend trend = ZoneTrend.of(ZONE, rising(4), List.of());
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(4), List.of(), 0);
         assertEquals(new Outlook.TooFew(4, 5), depth(trend).outlook());
         assertEquals(Interval.Reason.TOO_FEW, trend.interval().reason());
         assertEquals(Interval.MOST, trend.interval().days());
@@ -93,7 +93,7 @@ class ZoneTrendTest {
         List<JudgedZone> zones = rising(7);
         zones.add(survey(LocalDate.of(2025, 8, 1), 60, ",'materialRunning':'coal'"));
         zones.add(survey(LocalDate.of(2025, 9, 1), 62, ",'materialRunning':'coal'"));
-        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of());
+        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of(), 0);
         assertEquals(List.of(Change.Kind.MATERIAL), trend.changes().stream().map(Change::kind).toList());
         assertEquals(new Outlook.TooFew(2, 5), depth(trend).outlook());
         assertEquals(9, depth(trend).observations().size(), "what was before is still shown");
@@ -110,13 +110,13 @@ class ZoneTrendTest {
                 + "'left','type':'oblique','condition':'sound','length':{'value':6,'unit':'m'}},{'side':'right',"
                 + "'type':'oblique','condition':'sound','length':{'value':6,'unit':'m'}}],"
                 + "'skirtSpacing':{'value':800,'unit':'mm'}"));
-        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of());
+        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of(), 0);
         assertEquals(List.of(Change.Kind.SPEED, Change.Kind.SEALS, Change.Kind.SEALS, Change.Kind.BOARDS),
                 trend.changes().stream().map(Change::kind).toList());
     }
 
     private static List<Change> changes(List<JudgedZone> zones) {
-        return ZoneTrend.of(ZONE, zones, List.of()).changes();
+        return ZoneTrend.of(ZONE, zones, List.of(), 0).changes();
     }
 
     private static List<JudgedZone> months(List<String> readings) {
@@ -187,17 +187,17 @@ class ZoneTrendTest {
             steady.add(survey(LocalDate.of(2025, 1, 1).plusMonths(i), depths[i], ""));
             falling.add(survey(LocalDate.of(2025, 1, 1).plusMonths(i), 200 - 10 * i, ""));
         }
-        assertInstanceOf(Outlook.Level.class, depth(ZoneTrend.of(ZONE, steady, List.of())).outlook());
+        assertInstanceOf(Outlook.Level.class, depth(ZoneTrend.of(ZONE, steady, List.of(), 0)).outlook());
         Outlook.Trend trend = assertInstanceOf(Outlook.Trend.class,
-                depth(ZoneTrend.of(ZONE, falling, List.of())).outlook());
+                depth(ZoneTrend.of(ZONE, falling, List.of(), 0)).outlook());
         assertTrue(trend.line().slope() < 0);
         assertTrue(trend.overloaded().isEmpty());
-        assertEquals(Interval.Reason.NO_TREND, ZoneTrend.of(ZONE, falling, List.of()).interval().reason());
+        assertEquals(Interval.Reason.NO_TREND, ZoneTrend.of(ZONE, falling, List.of(), 0).interval().reason());
     }
 
     @Test
     void aReplacedSurveyIsShownAndNotCounted() {
-        ZoneTrend trend = ZoneTrend.of(ZONE, rising(5), List.of(survey(LocalDate.of(2025, 3, 2), 400, "")));
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(5), List.of(survey(LocalDate.of(2025, 3, 2), 400, "")), 0);
         assertEquals(6, depth(trend).observations().size());
         Outlook.Trend outlook = assertInstanceOf(Outlook.Trend.class, depth(trend).outlook());
         assertEquals(10, outlook.test().s());

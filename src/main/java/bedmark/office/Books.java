@@ -1,5 +1,6 @@
 package bedmark.office;
 
+import bedmark.document.Refused;
 import bedmark.index.office.OfficeTables;
 import bedmark.journal.NotSaved;
 import bedmark.survey.Entry;
@@ -16,6 +17,13 @@ interface Books extends AutoCloseable {
         /** Whether nothing would come of a deed; asked when nobody else can write any more. */
         boolean needless(OfficeTables tables, Deed deed);
 
+        /**
+         * Proves that what a deed changes is what the person saw; asked when nobody else can write any more.
+         *
+         * @throws Refused {@code register-changed-since}
+         */
+        void prove(OfficeTables tables, Deed deed);
+
         /** Brings onto the medium what the deeds will name. */
         void prepare(List<Deed> deeds);
 
@@ -27,10 +35,14 @@ interface Books extends AutoCloseable {
     record Pack(PackShelf.Laid laid, Intake intake) {
     }
 
-    /** A deed that waits to be done. */
-    record Deed(String person, OfficeDeed deed, Optional<Pack> pack) {
-        Deed(String person, OfficeDeed deed) {
-            this(person, deed, Optional.empty());
+    /**
+     * A deed that waits to be done.
+     *
+     * @param base the digest of the register that a change of it starts from, where that must hold still
+     */
+    record Deed(String person, OfficeDeed deed, Optional<Pack> pack, Optional<String> base) {
+        Deed(String person, OfficeDeed deed, Optional<Pack> pack) {
+            this(person, deed, pack, Optional.empty());
         }
     }
 

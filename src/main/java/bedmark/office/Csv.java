@@ -1,6 +1,7 @@
 package bedmark.office;
 
 import java.util.List;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 
 /**
@@ -9,6 +10,10 @@ import java.util.stream.Collectors;
  * that a reader who takes one away from each cell that has one has read exactly what was written.
  */
 public final class Csv {
+    private static final Pattern NUMBER = Pattern.compile("-?[0-9]+(\\.[0-9]+)?(E-?[0-9]+)?");
+    private static final Pattern LIKE_A_FORMULA =
+            Pattern.compile("['=+@\\-\\t\\r\\n\uFF1D\uFF0B\uFF0D\uFF20].*", Pattern.DOTALL);
+
     private Csv() {
     }
 
@@ -18,8 +23,12 @@ public final class Csv {
     }
 
     private static String cell(String text) {
-        boolean number = text.matches("-?[0-9]+(\\.[0-9]+)?(E-?[0-9]+)?");
-        String safe = !number && text.matches("(?s)['=+@\\-\\t\\r\\n\uFF1D\uFF0B\uFF0D\uFF20].*") ? "'" + text : text;
+        String safe = !NUMBER.matcher(text).matches() && LIKE_A_FORMULA.matcher(text).matches() ? "'" + text : text;
         return safe.matches("(?s).*[\",\\r\\n].*") ? "\"" + safe.replace("\"", "\"\"") + "\"" : safe;
+    }
+
+    /** Whether a cell that was read has the apostrophe before it that {@link #row} puts there. */
+    public static boolean guarded(String cell) {
+        return cell.startsWith("'") && LIKE_A_FORMULA.matcher(cell.substring(1)).matches();
     }
 }

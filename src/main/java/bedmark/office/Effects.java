@@ -1,5 +1,7 @@
 package bedmark.office;
 
+import bedmark.document.Defect;
+import bedmark.document.Refused;
 import bedmark.index.office.OfficeTables;
 import bedmark.index.office.PlantRow;
 import bedmark.index.office.Standing;
@@ -41,6 +43,16 @@ final class Effects implements Books.Effect {
     @Override
     public boolean needless(OfficeTables tables, Books.Deed deed) {
         return deed.deed() instanceof OfficeDeed.PackReceived pack && tables.hasPack(pack.sha256());
+    }
+
+    @Override
+    public void prove(OfficeTables tables, Books.Deed deed) {
+        if (deed.base().isPresent() && deed.deed() instanceof OfficeDeed.RegisterChanged changed) {
+            Optional<String> holds = tables.plant(changed.plant()).map(PlantRow::digest);
+            if (holds.isPresent() && !holds.equals(deed.base())) {
+                throw new Refused(Defect.in("", "register-changed-since"));
+            }
+        }
     }
 
     @Override

@@ -252,10 +252,20 @@ public final class OfficeStore implements AutoCloseable {
      * @return the entry with its number and time
      */
     public Entry act(String person, OfficeDeed deed) {
+        return act(person, deed, Optional.empty());
+    }
+
+    /**
+     * As {@link #act(String, OfficeDeed)}, but only where what it changes is still as the person saw it.
+     *
+     * @param base the digest of the register that a change of it starts from
+     * @throws Refused {@code register-changed-since}
+     */
+    public Entry act(String person, OfficeDeed deed, Optional<String> base) {
         if (deed instanceof OfficeDeed.PackReceived) {
             throw new IllegalArgumentException("a pack is received");
         }
-        return keep(List.of(new Books.Deed(person, deed))).get(0).orElseThrow();
+        return keep(List.of(new Books.Deed(person, deed, Optional.empty(), base))).get(0).orElseThrow();
     }
 
     /** As {@link Books#keep}. */

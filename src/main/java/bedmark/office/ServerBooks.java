@@ -58,6 +58,7 @@ final class ServerBooks implements Books {
             if (effect.needless(tables(), deed)) {
                 return Optional.<Entry>empty();
             }
+            effect.prove(tables(), deed);
             effect.prepare(List.of(deed));
             Entry entry = new Entry(tables().lastDeed() + 1, at, deed.person(), device,
                     new Act.OfficeActed(deed.deed()));

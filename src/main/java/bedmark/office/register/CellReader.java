@@ -19,6 +19,9 @@ final class CellReader {
     private static final int LONGEST = 500;
     private static final int LARGEST_EXPONENT = 12;
     private static final BigDecimal LARGEST = BigDecimal.TEN.pow(LARGEST_EXPONENT);
+    private static final BigDecimal SMALLEST = BigDecimal.ONE.movePointLeft(LARGEST_EXPONENT);
+    /** A comma before three digits: a decimal sign here and a group of thousands there. */
+    private static final Pattern UNCLEAR = Pattern.compile("([+-]?[1-9][0-9]{0,2}),([0-9]{3})");
     private static final Pattern NUMBER = Pattern.compile("([+-]?[0-9]+(?:[.,][0-9]+)?(?:[eE][+-]?[0-9]{1,3})?)"
             + "\\s*(.*)", Pattern.DOTALL);
     private static final Set<String> YES = Set.of("true", "yes", "1", "x", "sí", "si", "wahr", "ja");
@@ -64,8 +67,8 @@ final class CellReader {
      *
      * @param unit the unit that the column's head names
      */
-    static Node read(String cell, Kind kind, Optional<Unit> unit) throws Unfit {
-        String text = cell.matches("(?s)'[=+@-].*") ? cell.substring(1) : cell;
+    static Node read(Table.Cell cell, Kind kind, Optional<Unit> unit) throws Unfit {
+        String text = cell.text();
         if (text.length() > LONGEST) {
             throw new Unfit("cell-too-long", Integer.toString(LONGEST));
         }
@@ -82,7 +85,7 @@ final class CellReader {
             if (!word.words().contains(text)) {
                 throw new Unfit("cell-word-unknown", text, String.join(", ", word.words()));
             }
-        } else if (cell.startsWith("=")) {
+        } else if (text.startsWith("=") && !cell.guarded()) {
             throw new Unfit("cell-formula", text);
         }
         return Node.text(text);
@@ -147,8 +150,14 @@ final class CellReader {
     }
 
     private static BigDecimal decimal(String text) throws Unfit {
+        Matcher unclear = UNCLEAR.matcher(text);
+        if (unclear.matches()) {
+            throw new Unfit("cell-number-unclear", text, unclear.group(1) + unclear.group(2),
+                    unclear.group(1) + "." + unclear.group(2));
+        }
         BigDecimal number = new BigDecimal(text.replace(',', '.'));
-        if (number.abs().compareTo(LARGEST) > 0 || number.scale() > LARGEST_EXPONENT) {
+        boolean tiny = number.signum() != 0 && number.abs().compareTo(SMALLEST) < 0;
+        if (tiny || number.abs().compareTo(LARGEST) > 0) {
             throw new Unfit("cell-number-too-large", text);
         }
         return number.scale() < 0 ? number.setScale(0) : number;

@@ -71,6 +71,16 @@ record Column(String key, Kind kind, boolean required) {
         return lists;
     }
 
+    /** The keys by which a list's rows are told apart. */
+    static List<String> identity(String list) {
+        return switch (list) {
+            case ROUNDS -> List.of("id", "transfer");
+            case LIMITS -> List.of("rule");
+            case SEAL_RATES -> List.of("type", "condition");
+            default -> List.of("id");
+        };
+    }
+
     private static Column id() {
         return new Column("id", new Kind.Id(), true);
     }

@@ -7,6 +7,7 @@ import java.util.List;
 /**
  * What tables would make of a register: nothing of it holds until it is taken over as a whole.
  *
+ * @param base    what the register was when this was made
  * @param head    {@code plant}, {@code forms} and {@code rounds} as they would be
  * @param mapping each column that was found, in its order
  * @param defects every bad row and cell; where there is one, the draft can't be taken over
@@ -14,7 +15,8 @@ import java.util.List;
  * @param changed rows that say something else than the register
  * @param same    rows that say the same
  */
-public record Draft(Branch head, List<Mapped> mapping, List<Defect> defects, int added, int changed, int same) {
+public record Draft(Branch base, Branch head, List<Mapped> mapping, List<Defect> defects, int added, int changed,
+                    int same) {
     public Draft {
         mapping = List.copyOf(mapping);
         defects = List.copyOf(defects);

@@ -4,6 +4,8 @@ import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.document.Refused;
+import bedmark.journal.Digest;
+import bedmark.json.Canonical;
 import bedmark.office.OfficeStore;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Register;
@@ -40,24 +42,29 @@ public final class RegisterDesk {
     /**
      * Takes a draft over.
      *
-     * @throws Refused {@code draft-unsound} where it has defects; whatever makes a register impossible
+     * @throws Refused {@code draft-unsound} where it has defects, {@code register-changed-since} where the register is
+     *                 no longer what the draft was made from; whatever makes a register impossible
      */
     public void take(Draft draft, String why, String person) {
         if (!draft.sound()) {
             throw new Refused(Defect.in("", "draft-unsound", Integer.toString(draft.defects().size())));
         }
-        take(draft.head(), why, person);
+        take(draft.head(), why, person, Optional.of(Digest.of(Canonical.bytes(draft.base())).hex()));
     }
 
     /** Takes a head over that a person changed; nothing happens where it says what holds already. */
     public void take(Branch head, String why, String person) {
+        take(head, why, person, Optional.empty());
+    }
+
+    private void take(Branch head, String why, String person, Optional<String> base) {
         if (person.isBlank()) {
             throw new Refused(Defect.in("", "person-absent"));
         }
         Branch plant = head.branch("plant").orElse(Branch.EMPTY);
         String id = new Register(plant).document().text("id").orElse("");
         if (!store.head(id).equals(Optional.of(head))) {
-            store.act(person, new OfficeDeed.RegisterChanged(id, head, why));
+            store.act(person, new OfficeDeed.RegisterChanged(id, head, why), base);
         }
     }
 }

@@ -3,6 +3,9 @@ package bedmark.office.register;
 import bedmark.document.Branch;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.IntStream;
 
 /**
  * One list of a register as a grid of texts.
@@ -25,18 +28,65 @@ public record RegisterGrid(String list, List<String> keys, List<List<String>> ro
                 keys.stream().map(key -> RegisterTables.cell(row, key)).toList()).toList());
     }
 
-    /** The table that changes one cell: the row's identity and that cell. A row after the last one is new. */
+    /** The keys of a list that every row must have, the first of which can't be changed later. */
+    public static List<String> required(String list) {
+        return Column.LISTS.get(list).stream().filter(Column::required).map(Column::key).toList();
+    }
+
+    /** What a row is known by among the others. */
+    public List<String> identity(int row) {
+        List<String> named = Column.identity(list);
+        return IntStream.range(0, keys.size()).filter(i -> named.contains(keys.get(i)))
+                .mapToObj(i -> rows.get(row).get(i)).toList();
+    }
+
+    /** The row that is known by that. */
+    public Optional<Integer> row(List<String> identity) {
+        return IntStream.range(0, rows.size()).filter(row -> identity(row).equals(identity)).boxed().findFirst();
+    }
+
+    /** As {@link #edit(int, Map)}, for one cell. */
     public Table edit(int row, String key, String text) {
-        List<String> heads = new ArrayList<>();
-        List<Table.Cell> cells = new ArrayList<>();
-        for (int i = 0; i < keys.size(); i++) {
-            boolean edited = keys.get(i).equals(key);
-            if (edited || Column.LISTS.get(list).get(i).required() && row < rows.size()) {
-                heads.add(keys.get(i));
-                cells.add(new Table.Cell(edited ? text.strip() : rows.get(row).get(i), false));
-            }
+        return edit(row, Map.of(key, text));
+    }
+
+    /**
+     * The table that changes cells of one row: what the row must have, and these cells. A row after the last one is
+     * new. Since a round is replaced by its rows, all of them stand there.
+     *
+     * @param cells texts by key
+     */
+    public Table edit(int row, Map<String, String> cells) {
+        boolean fresh = row >= rows.size();
+        List<Integer> taken = IntStream.range(0, keys.size()).filter(i -> cells.containsKey(keys.get(i))
+                || list.equals(Column.ROUNDS) || !fresh && required(list).contains(keys.get(i))).boxed().toList();
+        List<Table.Row> made = new ArrayList<>();
+        made.add(new Table.Row(1, taken.stream().map(i -> new Table.Cell(keys.get(i), false)).toList()));
+        List<String> edited = IntStream.range(0, keys.size()).mapToObj(i -> cells.getOrDefault(keys.get(i),
+                fresh ? "" : rows.get(row).get(i)).strip()).toList();
+        if (list.equals(Column.ROUNDS)) {
+            IntStream.range(0, rows.size()).filter(i -> i != row && rows.get(i).get(0).equals(edited.get(0)))
+                    .forEach(i -> made.add(new Table.Row(i + 1, cells(renamed(rows.get(i), edited, cells), taken))));
+            made.add(fresh ? made.size() : place(row, edited), new Table.Row(row + 1, cells(edited, taken)));
+        } else {
+            made.add(new Table.Row(row + 1, cells(edited, taken)));
         }
-        return new Table(list, list, List.of(new Table.Row(1, heads.stream().map(head -> new Table.Cell(head, false))
-                .toList()), new Table.Row(row + 1, cells)));
+        return new Table(list, list, made);
+    }
+
+    /** Where the edited row stands among those of its round, after the head. */
+    private int place(int row, List<String> edited) {
+        return 1 + (int) rows.subList(0, row).stream().filter(one -> one.get(0).equals(edited.get(0))).count();
+    }
+
+    /** A round has one name, which is written in each of its rows. */
+    private List<String> renamed(List<String> other, List<String> edited, Map<String, String> cells) {
+        int name = keys.indexOf("name");
+        return IntStream.range(0, keys.size()).mapToObj(i -> i == name && cells.containsKey("name")
+                ? edited.get(i) : other.get(i)).toList();
+    }
+
+    private static List<Table.Cell> cells(List<String> row, List<Integer> taken) {
+        return taken.stream().map(i -> new Table.Cell(row.get(i), false)).toList();
     }
 }

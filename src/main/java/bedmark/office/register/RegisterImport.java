@@ -8,12 +8,11 @@ import bedmark.document.Refused;
 import bedmark.json.BundleReader;
 import bedmark.json.Canonical;
 import bedmark.office.register.Draft.Mapped;
-import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -24,18 +23,23 @@ import java.util.regex.Pattern;
 
 /**
  * Makes a draft of a register from tables. Rows are added to what is there or change it, by their ids; what a table
- * does not name stays. A round's points are replaced by the rows of that round.
+ * does not name stays, and so does what an empty cell stands for. A round's points are replaced by the rows of that
+ * round. A change made on the screen is taken in likewise, but there an empty cell empties what it stands for.
  */
 public final class RegisterImport {
     private static final Pattern HEAD = Pattern.compile("(.*?)\\s*[\\[(]\\s*(.+?)\\s*[\\])]?\\s*");
 
     private final Map<String, String> renamed;
+    private final boolean emptying;
+    private final Map<String, Map<String, Branch>> held = new LinkedHashMap<>();
     private final Map<String, Map<String, Branch>> lists = new LinkedHashMap<>();
+    private final RegisterProof proof = new RegisterProof(held, lists);
     private final Map<String, Map<String, String>> places = new HashMap<>();
     private final List<Mapped> mapping = new ArrayList<>();
     private final List<Defect> defects = new ArrayList<>();
-    private final Set<String> roundsBegun = new HashSet<>();
+    private final Set<String> roundsBegun = new LinkedHashSet<>();
     private final Branch before;
+    private Optional<String> released = Optional.empty();
     private int added;
     private int changed;
     private int same;
@@ -44,13 +48,16 @@ public final class RegisterImport {
     private record Taken(int index, Column column, Optional<Unit> unit, String head) {
     }
 
-    private RegisterImport(Branch before, Map<String, String> renamed) {
+    /** @param emptying whether an empty cell empties what it stands for */
+    private RegisterImport(Branch before, Map<String, String> renamed, boolean emptying) {
         this.before = before;
         this.renamed = renamed;
+        this.emptying = emptying;
         Branch plant = before.branch("plant").orElse(Branch.EMPTY);
         for (String list : Column.LISTS.keySet()) {
             Map<String, Branch> rows = new LinkedHashMap<>();
             held(plant, list).forEach(row -> rows.put(id(list, row), row));
+            held.put(list, Map.copyOf(rows));
             lists.put(list, rows);
             places.put(list, new HashMap<>());
         }
@@ -92,7 +99,7 @@ public final class RegisterImport {
      * @param renamed what columns hold whose heads don't say so, by head: {@code beltWidth}, or {@code beltWidth [mm]}
      */
     public static Draft draft(Branch head, List<Table> tables, Map<String, String> renamed) {
-        RegisterImport work = new RegisterImport(head, renamed);
+        RegisterImport work = new RegisterImport(head, renamed, false);
         // What is referred to comes first, in whatever order the tables came.
         for (String list : Column.LISTS.keySet()) {
             tables.stream().filter(table -> list(table.name()).equals(Optional.of(list)))
@@ -101,11 +108,59 @@ public final class RegisterImport {
         tables.stream().filter(table -> list(table.name()).isEmpty()).forEach(table -> work.defects.add(
                 Defect.in(table.source(), "table-unknown", table.name(),
                         String.join(", ", Column.LISTS.keySet()))));
-        Branch made = work.made();
-        if (work.defects.isEmpty()) {
-            work.proveWhole(made);
+        return work.draft();
+    }
+
+    /**
+     * Makes a draft of one change that a person made on the screen.
+     *
+     * @throws Refused {@code register-changed-since} where the row is not there any more
+     */
+    public static Draft changed(Branch head, RegisterChange change) {
+        String list = change.list();
+        RegisterGrid grid = RegisterGrid.of(head, list);
+        RegisterImport work = new RegisterImport(head, Map.of(), true);
+        Optional<Integer> row = change.row().flatMap(grid::row);
+        if (row.isEmpty() && change.row().isPresent()) {
+            throw new Refused(Defect.in("", "register-changed-since"));
         }
-        return new Draft(made, work.mapping, work.defects, work.added, work.changed, work.same);
+        if (!list.equals(Column.ROUNDS)) {
+            work.reserve(grid, row);
+        }
+        Table table = grid.edit(row.orElse(grid.rows().size()), change.cells());
+        if (list.equals(Column.SEAL_RATES)) {
+            row.ifPresent(work::release);
+        }
+        work.take(table, list);
+        return work.draft();
+    }
+
+    /** What a change makes of a row must not be another row. */
+    private void reserve(RegisterGrid grid, Optional<Integer> but) {
+        for (int i = 0; i < grid.rows().size(); i++) {
+            if (!but.equals(Optional.of(i))) {
+                places.get(grid.list()).put(String.join(" ", grid.identity(i)), grid.list() + ":" + (i + 1));
+            }
+        }
+    }
+
+    /** Takes a rate away before it comes back under another name, at the same place among the others. */
+    private void release(int row) {
+        Map<String, Branch> rates = lists.get(Column.SEAL_RATES);
+        List<Branch> typed = rates.values().stream().filter(rate -> rate.has("type")).toList();
+        released = Optional.of(id(Column.SEAL_RATES, typed.get(row)));
+    }
+
+    private Draft draft() {
+        if (defects.isEmpty()) {
+            defects.addAll(proof.whole(places));
+        }
+        countRounds();
+        Branch made = made();
+        if (defects.isEmpty()) {
+            proveWhole(made);
+        }
+        return new Draft(before, made, mapping, defects, added, changed, same);
     }
 
     private static Optional<String> list(String name) {
@@ -133,6 +188,9 @@ public final class RegisterImport {
         for (Table.Row row : table.rows().subList(1, table.rows().size())) {
             if (row.cells().stream().skip(width).anyMatch(cell -> !cell.text().isEmpty())) {
                 defects.add(Defect.in(place(table, row), "row-too-long", Integer.toString(row.cells().size()),
+                        Integer.toString(width)));
+            } else if (row.cells().size() < width) {
+                defects.add(Defect.in(place(table, row), "row-too-short", Integer.toString(row.cells().size()),
                         Integer.toString(width)));
             } else {
                 take(table, list, row, columns);
@@ -174,44 +232,59 @@ public final class RegisterImport {
 
     private void take(Table table, String list, Table.Row row, List<Taken> columns) {
         int bad = defects.size();
+        Branch old = old(list, row, columns);
         Branch read = Branch.EMPTY;
+        Set<String> emptied = new LinkedHashSet<>();
         for (Taken taken : columns) {
-            Table.Cell cell = taken.index() < row.cells().size() ? row.cells().get(taken.index())
-                    : new Table.Cell("", false);
+            Table.Cell cell = row.cells().get(taken.index());
             String where = place(table, row) + " " + taken.head();
             if (cell.failed()) {
                 defects.add(Defect.in(where, "cell-formula-error", cell.text()));
-            } else if (cell.text().isBlank()) {
-                if (taken.column().required()) {
-                    defects.add(Defect.in(where, "cell-absent"));
-                }
-            } else {
-                read = read(read, cell.text(), taken, where);
+            } else if (!cell.text().isBlank()) {
+                read = read(read, old, cell, taken, where);
+            } else if (taken.column().required()) {
+                defects.add(Defect.in(where, "cell-absent"));
+            } else if (emptying) {
+                emptied.add(taken.column().key());
             }
         }
         if (defects.size() == bad) {
-            put(list, read, place(table, row));
+            put(list, read, emptied, place(table, row));
         }
     }
 
-    private Branch read(Branch row, String text, Taken taken, String where) {
+    /** The row that is there already under the id that a table's row has. */
+    private Branch old(String list, Table.Row row, List<Taken> columns) {
+        Branch named = Branch.EMPTY;
+        for (Taken taken : columns) {
+            named = named.with(taken.column().key(), row.cells().get(taken.index()).text());
+        }
+        return held.get(list).getOrDefault(id(list, named), Branch.EMPTY);
+    }
+
+    private Branch read(Branch row, Branch old, Table.Cell cell, Taken taken, String where) {
+        Column column = taken.column();
+        String text = cell.text();
+        if (old.has(column.key()) && RegisterTables.cell(old, column.key()).strip().equals(text)) {
+            // What holds already may hold on, whoever let it in.
+            return row.with(column.key(), old.get(column.key()).orElseThrow());
+        }
         try {
-            Node value = CellReader.read(text, taken.column().kind(), taken.unit());
-            if (taken.column().kind() instanceof Kind.Reference reference
-                    && !lists.get(reference.list()).containsKey(text)) {
+            Node value = CellReader.read(cell, column.kind(), taken.unit());
+            if (column.kind() instanceof Kind.Reference reference && !lists.get(reference.list()).containsKey(text)) {
                 throw new CellReader.Unfit("cell-reference-unknown", text, reference.list());
             }
-            return row.with(taken.column().key(), value);
+            return row.with(column.key(), value);
         } catch (CellReader.Unfit e) {
             defects.add(new Defect(e.code(), where, e.details()));
             return row;
         }
     }
 
-    private void put(String list, Branch row, String where) {
+    private void put(String list, Branch row, Set<String> emptied, String where) {
         String id = id(list, row);
         if (list.equals(Column.ROUNDS)) {
-            point(id, row, where);
+            point(id, row, emptied, where);
             return;
         }
         String twice = places.get(list).putIfAbsent(id, where);
@@ -219,26 +292,42 @@ public final class RegisterImport {
             defects.add(Defect.in(where, "row-twice", id, twice));
             return;
         }
-        Branch old = lists.get(list).getOrDefault(id, Branch.EMPTY);
-        Branch merged = row.members().entrySet().stream().reduce(old, (made, member) ->
-                saysTheSame(made.get(member.getKey()), member.getValue()) ? made
-                        : made.with(member.getKey(), member.getValue()), (one, other) -> other);
-        count(list, id, merged);
-        if (plausible(list, merged, where)) {
-            lists.get(list).put(id, merged);
+        Branch old = released.map(before -> lists.get(list).get(before))
+                .orElseGet(() -> lists.get(list).getOrDefault(id, Branch.EMPTY));
+        Branch merged = old;
+        for (Map.Entry<String, Node> member : row.members().entrySet()) {
+            merged = saysTheSame(old, row, member.getKey()) ? merged
+                    : merged.with(member.getKey(), member.getValue());
+        }
+        for (String key : emptied) {
+            merged = merged.without(key);
+        }
+        count(old, merged);
+        List<Defect> wrong = merged.equals(old) ? List.of() : proof.row(list, merged, where);
+        defects.addAll(wrong);
+        if (wrong.isEmpty()) {
+            place(lists.get(list), id, merged);
         }
     }
 
-    /** The same number in the same unit keeps what else is known of it, such as how it was typed. */
-    private static boolean saysTheSame(Optional<Node> before, Node now) {
-        return before.filter(old -> old instanceof Branch one && now instanceof Branch other
-                && one.get("value").equals(other.get("value")) && one.get("unit").equals(other.get("unit")))
-                .isPresent();
+    private void place(Map<String, Branch> rows, String id, Branch row) {
+        if (released.isEmpty() || released.get().equals(id)) {
+            rows.put(id, row);
+            return;
+        }
+        Map<String, Branch> all = new LinkedHashMap<>(rows);
+        rows.clear();
+        all.forEach((key, other) -> rows.put(key.equals(released.get()) ? id : key,
+                key.equals(released.get()) ? row : other));
     }
 
-    private void count(String list, String id, Branch merged) {
-        Branch old = lists.get(list).get(id);
-        if (old == null) {
+    /** What is written the same keeps what else is known of it, such as how it was typed. */
+    private static boolean saysTheSame(Branch old, Branch row, String key) {
+        return old.has(key) && RegisterTables.cell(old, key).equals(RegisterTables.cell(row, key));
+    }
+
+    private void count(Branch old, Branch merged) {
+        if (old.equals(Branch.EMPTY)) {
             added++;
         } else if (old.equals(merged)) {
             same++;
@@ -247,63 +336,42 @@ public final class RegisterImport {
         }
     }
 
-    private void point(String id, Branch row, String where) {
+    private void point(String id, Branch row, Set<String> emptied, String where) {
         Branch old = lists.get(Column.ROUNDS).getOrDefault(id, Branch.EMPTY.with("id", id));
         Branch round = roundsBegun.add(id) ? old.with("points", new Node.Series(List.of())) : old;
         List<Node> points = new ArrayList<>(round.series("points"));
         String transfer = row.text("transfer").orElseThrow();
-        if (points.stream().anyMatch(point -> point instanceof Branch one
-                && one.text("transfer").equals(Optional.of(transfer)))) {
+        if (round.branches("points").stream().anyMatch(point -> point.text("transfer").equals(Optional.of(transfer)))) {
             defects.add(Defect.in(where, "row-point-twice", transfer, id));
             return;
         }
-        points.add(Branch.EMPTY.with("transfer", transfer));
+        points.add(pointBefore(id, transfer).orElse(Branch.EMPTY.with("transfer", transfer)));
         Branch longer = round.with("points", new Node.Series(points));
-        added++;
-        lists.get(Column.ROUNDS).put(id, row.text("name").map(name -> longer.with("name", name)).orElse(longer));
+        for (String key : emptied) {
+            longer = longer.without(key);
+        }
+        lists.get(Column.ROUNDS).put(id, row.has("name")
+                ? longer.with("name", row.get("name").orElseThrow()) : longer);
     }
 
-    /** What no single cell tells. */
-    private boolean plausible(String list, Branch row, String where) {
-        int bad = defects.size();
-        if (list.equals("conveyors")) {
-            lessThan(row.quantity("centreRollLength"), row.quantity("beltWidth"), where, "row-roll-over-belt");
-        } else if (list.equals("transfers")) {
-            Branch conveyor = lists.get("conveyors").getOrDefault(row.text("conveyor").orElse(""), Branch.EMPTY);
-            lessThan(row.quantity("skirtSpacing"), conveyor.quantity("beltWidth"), where, "row-boards-over-belt");
-        } else if (list.equals(Column.LIMITS)) {
-            limits(row, where);
-        }
-        for (String key : List.of("tag", "assetId")) {
-            if (list.equals("conveyors") || list.equals("transfers")) {
-                row.text(key).ifPresent(text -> once(list, key, text, id(list, row), where));
+    /** A point that the round has already, with what else is known of it. */
+    private Optional<Branch> pointBefore(String round, String transfer) {
+        return held.get(Column.ROUNDS).getOrDefault(round, Branch.EMPTY).branches("points").stream()
+                .filter(point -> point.text("transfer").equals(Optional.of(transfer))).findFirst();
+    }
+
+    /** Rows of rounds are counted once their rounds are whole. */
+    private void countRounds() {
+        for (String id : roundsBegun) {
+            Branch old = held.get(Column.ROUNDS).getOrDefault(id, Branch.EMPTY);
+            Branch round = lists.get(Column.ROUNDS).getOrDefault(id, old);
+            List<Node> kept = round.series("points").stream().filter(old.series("points")::contains).toList();
+            added += round.series("points").size() - kept.size();
+            if (kept.equals(old.series("points")) && round.without("points").equals(old.without("points"))) {
+                same += kept.size();
+            } else {
+                changed += kept.size();
             }
-        }
-        return defects.size() == bad;
-    }
-
-    private void once(String list, String key, String text, String id, String where) {
-        lists.get(list).values().stream().filter(other -> !id(list, other).equals(id)
-                        && other.text(key).equals(Optional.of(text))).findFirst()
-                .ifPresent(other -> defects.add(Defect.in(where, "row-name-twice", key, text, id(list, other))));
-    }
-
-    private void lessThan(Optional<Quantity> small, Optional<Quantity> large, String where, String code) {
-        if (small.isPresent() && large.isPresent() && Quantity.BY_SIZE.compare(small.get(), large.get()) >= 0) {
-            defects.add(Defect.in(where, code, show(small.get()), show(large.get())));
-        }
-    }
-
-    private static String show(Quantity quantity) {
-        return quantity.value().toPlainString() + " " + quantity.unit().code();
-    }
-
-    private void limits(Branch row, String where) {
-        var near = row.number("near");
-        var over = row.number("overloaded");
-        if (near.isPresent() && over.isPresent() && near.get().compareTo(over.get()) > 0) {
-            defects.add(Defect.in(where, "row-limits-crossed", near.get().toPlainString(),
-                    over.get().toPlainString()));
         }
     }
 
@@ -317,13 +385,17 @@ public final class RegisterImport {
         }
         Branch limits = plant.branch("limits").orElse(Branch.EMPTY);
         for (Map.Entry<String, Branch> limit : lists.get(Column.LIMITS).entrySet()) {
-            limits = limits.with(limit.getKey(), limit.getValue().without("rule"));
+            Branch said = limit.getValue().without("rule");
+            if (!limit.getValue().equals(held.get(Column.LIMITS).get(limit.getKey()))) {
+                limits = said.members().isEmpty() ? limits.without(limit.getKey()) : limits.with(limit.getKey(), said);
+            }
         }
-        if (!limits.members().isEmpty()) {
+        if (!limits.members().isEmpty() || plant.has("limits")) {
             plant = plant.with("limits", limits);
         }
-        return before.with("plant", plant).with("rounds",
-                new Node.Series(new ArrayList<>(lists.get(Column.ROUNDS).values())));
+        List<Node> rounds = new ArrayList<>(lists.get(Column.ROUNDS).values());
+        Branch made = before.with("plant", plant);
+        return rounds.isEmpty() && !before.has("rounds") ? made : made.with("rounds", new Node.Series(rounds));
     }
 
     /** The whole must be what a bundle may hold. */

@@ -22,10 +22,16 @@ public record Table(String source, String name, List<Row> rows) {
     }
 
     /**
-     * @param text   as it stands there, without spaces around it
-     * @param failed whether it is the error of a formula
+     * @param text    as it stands there, without spaces around it
+     * @param failed  whether it is the error of a formula
+     * @param guarded whether it is said to be a text, whatever it begins with
      */
-    public record Cell(String text, boolean failed) {
+    public record Cell(String text, boolean failed, boolean guarded) {
+        static final Cell BLANK = new Cell("", false);
+
+        Cell(String text, boolean failed) {
+            this(text, failed, false);
+        }
     }
 
     public Table {

@@ -2,6 +2,7 @@ package bedmark.office.register;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.office.Csv;
 import bedmark.office.register.Table.Cell;
 import bedmark.office.register.Table.Row;
 import java.io.IOException;
@@ -9,6 +10,7 @@ import java.io.InputStream;
 import java.io.StringReader;
 import java.io.UncheckedIOException;
 import java.math.BigDecimal;
+import java.math.MathContext;
 import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
@@ -17,6 +19,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVParser;
@@ -28,6 +31,8 @@ import org.dhatim.fastexcel.reader.Sheet;
 /** Reads tables: CSV with commas, semicolons or tabs, and workbooks. */
 public final class Tables {
     private static final long LARGEST = 64L << 20;
+    private static final MathContext WORKBOOK_DIGITS = new MathContext(15);
+    private static final Pattern LONG_FRACTION = Pattern.compile("-?[0-9]*\\.[0-9]{10,}(?:E[+-]?[0-9]{1,3})?");
 
     private Tables() {
     }
@@ -67,15 +72,21 @@ public final class Tables {
         CSVFormat format = CSVFormat.RFC4180.builder().setDelimiter(delimiter(body)).get();
         List<Row> rows = new ArrayList<>();
         try (CSVParser parser = format.parse(new StringReader(body))) {
+            int line = 1;
             for (CSVRecord record : parser) {
-                long line = parser.getCurrentLineNumber();
-                rows.add(new Row((int) Math.max(rows.size() + 1L, line),
-                        Stream.of(record.values()).map(cell -> new Cell(cell.strip(), false)).toList()));
+                rows.add(new Row(line, Stream.of(record.values()).map(Tables::text).toList()));
+                line = (int) parser.getCurrentLineNumber() + 1;
             }
         } catch (UncheckedIOException | IllegalStateException e) {
             throw new Refused(Defect.in(name, "table-quotes-wrong", Integer.toString(rows.size() + 1)), e);
         }
         return new Table(name, stem(name), rows);
+    }
+
+    /** A text without the apostrophe that an export put before it. */
+    private static Cell text(String cell) {
+        boolean guarded = Csv.guarded(cell);
+        return new Cell((guarded ? cell.substring(1) : cell).strip(), false, guarded);
     }
 
     /** What stands most often in the first line, outside of quotes. */
@@ -98,13 +109,20 @@ public final class Tables {
                 try (Stream<org.dhatim.fastexcel.reader.Row> read = sheet.openStream()) {
                     read.forEach(row -> rows.add(new Row(row.getRowNum(), row.stream().map(Tables::cell).toList())));
                 }
-                tables.add(new Table(name + " / " + sheet.getName(), sheet.getName(), rows));
+                tables.add(new Table(name + " / " + sheet.getName(), sheet.getName(), filled(rows)));
             }
         } catch (RuntimeException e) {
             // The library fails in ways of its own on what is no workbook.
             throw new Refused(Defect.in(name, "table-no-workbook"), e);
         }
         return tables;
+    }
+
+    /** A workbook does not keep the empty cells at the end of a row. */
+    private static List<Row> filled(List<Row> rows) {
+        int width = rows.stream().filter(row -> !row.blank()).findFirst().map(row -> row.cells().size()).orElse(0);
+        return rows.stream().map(row -> new Row(row.number(), Stream.concat(row.cells().stream(),
+                Stream.generate(() -> Cell.BLANK).limit(Math.max(0, width - row.cells().size()))).toList())).toList();
     }
 
     private static Cell cell(org.dhatim.fastexcel.reader.Cell cell) {
@@ -115,11 +133,19 @@ public final class Tables {
             return new Cell(String.valueOf(cell.getRawValue()), true);
         }
         if (cell.getValue() instanceof BigDecimal number) {
-            BigDecimal plain = number.signum() == 0 ? BigDecimal.ZERO : number.stripTrailingZeros();
-            return new Cell(plain.scale() < 0 ? plain.setScale(0).toPlainString() : plain.toPlainString(), false);
+            return new Cell(shortest(number), false);
         }
         String raw = cell.getRawValue() == null ? "" : cell.getRawValue().strip();
         boolean failed = cell.getType() == CellType.FORMULA && raw.startsWith("#");
-        return new Cell(cell.getType() == CellType.STRING ? cell.asString().strip() : raw, failed);
+        if (cell.getType() == CellType.FORMULA && LONG_FRACTION.matcher(raw).matches()) {
+            return new Cell(shortest(new BigDecimal(raw)), false);
+        }
+        return failed ? new Cell(raw, true) : text(cell.getType() == CellType.STRING ? cell.asString() : raw);
+    }
+
+    /** A workbook holds binary numbers: what stands behind their fifteenth digit is noise of the conversion. */
+    private static String shortest(BigDecimal number) {
+        BigDecimal rounded = number.round(WORKBOOK_DIGITS);
+        return (rounded.signum() == 0 ? BigDecimal.ZERO : rounded.stripTrailingZeros()).toPlainString();
     }
 }

@@ -5,6 +5,7 @@ import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.office.RoundDesk;
 import bedmark.office.register.Draft;
+import bedmark.office.register.RegisterChange;
 import bedmark.office.register.RegisterDesk;
 import bedmark.office.register.RegisterGrid;
 import bedmark.office.register.RegisterImport;
@@ -49,12 +50,12 @@ public final class RegisterModel {
 
     private void look() {
         String wanted = list.get();
-        plant.get().ifPresent(id -> desk.ask(progress -> RegisterGrid.of(head(id), wanted), found ->
+        plant.get().ifPresent(id -> desk.ask(progress -> RegisterGrid.of(head(Optional.of(id)), wanted), found ->
                 grid.set(Optional.of(found))));
     }
 
-    private Branch head(String id) {
-        return new RegisterDesk(desk.store()).head(Optional.of(id), List.of());
+    private Branch head(Optional<String> id) {
+        return new RegisterDesk(desk.store()).head(id, List.of());
     }
 
     public List<String> plants() {
@@ -86,24 +87,27 @@ public final class RegisterModel {
 
     /** Changes one cell, as an import of one row would. */
     public void edit(int row, String key, String text) {
+        String id = plant.get().orElseThrow();
         RegisterGrid shown = grid.get().orElseThrow();
+        RegisterChange change = new RegisterChange(shown.list(), Optional.of(shown.identity(row)), Map.of(key, text));
+        String person = desk.person();
         desk.change(progress -> {
-            Draft made = RegisterImport.draft(head(plant.get().orElseThrow()), List.of(shown.edit(row, key, text)),
-                    Map.of());
+            Draft made = RegisterImport.changed(head(Optional.of(id)), change);
             if (!made.sound()) {
                 throw new Refused(made.defects().get(0));
             }
-            new RegisterDesk(desk.store()).take(made, "edit", desk.person());
+            new RegisterDesk(desk.store()).take(made, "edit", person);
             return true;
         }, done -> look());
     }
 
     /** Reads the tables of a folder; nothing is taken in yet. */
     public void read(Path folder) {
+        Optional<String> id = plant.get();
         desk.ask(progress -> {
             List<Table> tables = new ArrayList<>();
             files(folder).forEach(file -> tables.addAll(Tables.read(file)));
-            return RegisterImport.draft(head(plant.get().orElseThrow()), tables, Map.of());
+            return RegisterImport.draft(head(id), tables, Map.of());
         }, made -> draft.set(Optional.of(made)));
     }
 
@@ -123,8 +127,9 @@ public final class RegisterModel {
     /** Takes the draft over. */
     public void take() {
         Draft made = draft.get().orElseThrow();
+        String person = desk.person();
         desk.change(progress -> {
-            new RegisterDesk(desk.store()).take(made, "import", desk.person());
+            new RegisterDesk(desk.store()).take(made, "import", person);
             return true;
         }, done -> {
             draft.set(Optional.empty());
@@ -139,9 +144,10 @@ public final class RegisterModel {
 
     /** Writes the register as tables. */
     public void write(Path folder) {
+        Optional<String> id = plant.get();
         desk.ask(progress -> {
             try {
-                for (Map.Entry<String, String> file : RegisterTables.of(head(plant.get().orElseThrow())).entrySet()) {
+                for (Map.Entry<String, String> file : RegisterTables.of(head(id)).entrySet()) {
                     Files.writeString(folder.resolve(file.getKey()), file.getValue());
                 }
                 return folder;
@@ -154,11 +160,13 @@ public final class RegisterModel {
 
     /** Writes the next round for the tablets. */
     public void send(Path folder) {
+        String id = plant.get().orElse("");
+        String person = desk.person();
         desk.change(progress -> {
             OffsetDateTime now = OffsetDateTime.now(desk.clock());
-            Path file = folder.resolve(plant.get().orElseThrow().replaceAll("[^A-Za-z0-9_-]", "_") + "-"
+            Path file = folder.resolve(id.replaceAll("[^A-Za-z0-9_-]", "_") + "-"
                     + now.toLocalDate() + RoundFile.ENDING);
-            new RoundDesk(desk.store()).send(plant.get().orElseThrow(), List.of(), file, now, desk.person());
+            new RoundDesk(desk.store()).send(id, List.of(), file, now, person);
             return file;
         }, done -> written.set(Optional.of(done)));
     }

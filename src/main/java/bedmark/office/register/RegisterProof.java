@@ -1,0 +1,106 @@
+package bedmark.office.register;
+
+import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.engine.verdict.Rule;
+import bedmark.engine.verdict.Sense;
+import bedmark.quantity.Quantity;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/** What no single cell tells of a register; what stood there before and is not touched is nobody's fault now. */
+final class RegisterProof {
+    private static final List<String> NAMED = List.of("conveyors", "transfers");
+    private static final List<String> NAMES = List.of("tag", "assetId");
+
+    private final Map<String, Map<String, Branch>> before;
+    private final Map<String, Map<String, Branch>> now;
+
+    /** @param now the lists as they become, by name and id; may still change between the questions */
+    RegisterProof(Map<String, Map<String, Branch>> before, Map<String, Map<String, Branch>> now) {
+        this.before = before;
+        this.now = now;
+    }
+
+    /** What is wrong with one row that says something new. */
+    List<Defect> row(String list, Branch row, String where) {
+        List<Defect> defects = new ArrayList<>();
+        if (list.equals("conveyors")) {
+            lessThan(row.quantity("centreRollLength"), row.quantity("beltWidth"), where, "row-roll-over-belt", defects);
+        } else if (list.equals("transfers")) {
+            lessThan(row.quantity("skirtSpacing"), belt(now, row), where, "row-boards-over-belt", defects);
+        } else if (list.equals(Column.LIMITS)) {
+            limits(row, where, defects);
+        }
+        return defects;
+    }
+
+    /**
+     * What is wrong between the rows once all of them are known.
+     *
+     * @param places where the rows stand that were taken in, by list and id
+     */
+    List<Defect> whole(Map<String, Map<String, String>> places) {
+        List<Defect> defects = new ArrayList<>();
+        now.get("transfers").forEach((id, row) -> {
+            String conveyor = row.text("conveyor").orElse("");
+            String where = places.get("conveyors").get(conveyor);
+            if (where != null && row.equals(before.get("transfers").get(id))
+                    && !belt(before, row).equals(belt(now, row))) {
+                lessThan(row.quantity("skirtSpacing"), belt(now, row), where + " beltWidth",
+                        "row-boards-over-belt", defects);
+            }
+        });
+        for (String list : NAMED) {
+            NAMES.forEach(key -> once(list, key, places.get(list), defects));
+        }
+        return defects;
+    }
+
+    private static Optional<Quantity> belt(Map<String, Map<String, Branch>> lists, Branch transfer) {
+        return Optional.ofNullable(lists.get("conveyors").get(transfer.text("conveyor").orElse("")))
+                .flatMap(conveyor -> conveyor.quantity("beltWidth"));
+    }
+
+    private void once(String list, String key, Map<String, String> places, List<Defect> defects) {
+        Map<String, String> first = new HashMap<>();
+        now.get(list).forEach((id, row) -> row.text(key).ifPresent(name -> {
+            String other = first.putIfAbsent(name, id);
+            if (other != null && fresh(list, id, key, name)) {
+                defects.add(Defect.in(places.get(id), "row-name-twice", key, name, other));
+            } else if (other != null && fresh(list, other, key, name)) {
+                defects.add(Defect.in(places.get(other), "row-name-twice", key, name, id));
+            }
+        }));
+    }
+
+    private boolean fresh(String list, String id, String key, String name) {
+        return !before.get(list).getOrDefault(id, Branch.EMPTY).text(key).equals(Optional.of(name));
+    }
+
+    private static void lessThan(Optional<Quantity> small, Optional<Quantity> large, String where, String code,
+                                 List<Defect> defects) {
+        if (small.isPresent() && large.isPresent() && Quantity.BY_SIZE.compare(small.get(), large.get()) >= 0) {
+            defects.add(Defect.in(where, code, show(small.get()), show(large.get())));
+        }
+    }
+
+    private static String show(Quantity quantity) {
+        return quantity.value().toPlainString() + " " + quantity.unit().code();
+    }
+
+    /** Near comes before overloaded on the way out of the limits, which is downwards for some rules. */
+    private static void limits(Branch row, String where, List<Defect> defects) {
+        Optional<BigDecimal> near = row.number("near");
+        Optional<BigDecimal> over = row.number("overloaded");
+        boolean under = row.text("rule").flatMap(Rule::ofCode).filter(rule -> rule.sense() == Sense.UNDER).isPresent();
+        if (near.isPresent() && over.isPresent() && near.get().compareTo(over.get()) * (under ? -1 : 1) > 0) {
+            defects.add(Defect.in(where, "row-limits-crossed", near.get().toPlainString(),
+                    over.get().toPlainString()));
+        }
+    }
+}

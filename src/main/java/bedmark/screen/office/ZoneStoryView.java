@@ -19,13 +19,12 @@ import bedmark.survey.merge.Clash;
 import bedmark.survey.merge.Copy;
 import bedmark.wording.Wording;
 import java.time.Instant;
-import java.time.LocalDate;
 import java.time.ZoneOffset;
 import java.util.Optional;
+import javafx.beans.property.SimpleStringProperty;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.ContentDisplay;
-import javafx.scene.control.DatePicker;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
@@ -43,7 +42,7 @@ final class ZoneStoryView extends ScrollPane {
     private final Runnable back;
     private final VBox content = new VBox();
     private final TextField reason = new TextField();
-    private final DatePicker until = new DatePicker();
+    private final DayField until;
     private Measure measure = Measure.DEPTH;
 
     ZoneStoryView(OfficeDesk desk, ZoneStoryModel model, Listening listening, Runnable back) {
@@ -55,7 +54,7 @@ final class ZoneStoryView extends ScrollPane {
         setContent(content);
         setFitToWidth(true);
         reason.setId("reason");
-        until.setId("until");
+        until = new DayField(wording, "until", wording.text("office.story.until"), new SimpleStringProperty(""));
         listening.to(model.storyProperty(), story -> show());
     }
 
@@ -138,8 +137,6 @@ final class ZoneStoryView extends ScrollPane {
         reason.setPromptText(wording.text("office.story.reason"));
         reason.setAccessibleText(wording.text("office.story.reason"));
         HBox.setHgrow(reason, Priority.ALWAYS);
-        until.setPromptText(wording.text("office.story.until"));
-        until.setAccessibleText(wording.text("office.story.until"));
         HBox decision = new HBox(reason, until);
         decision.getStyleClass().add("decision");
         box.getChildren().add(decision);
@@ -156,7 +153,7 @@ final class ZoneStoryView extends ScrollPane {
                 + wording.text("verdict.level." + line.level().code());
         VBox text = new VBox(Texts.wrapped(words));
         answered.ifPresent(one -> text.getChildren().add(Texts.wrapped(wording.text("office.story.answer."
-                + one.answer().code(), one.person(), one.until().map(LocalDate::toString).orElse("–"),
+                + one.answer().code(), one.person(), until(one),
                 one.reason()))));
         text.setMinWidth(0);
         text.setAlignment(Pos.CENTER_LEFT);
@@ -169,12 +166,17 @@ final class ZoneStoryView extends ScrollPane {
                     model.reopen(line.rule(), reason.getText())));
         } else {
             row.getChildren().addAll(
-                    button("accept-" + line.rule().code(), "office.story.accept", () -> model.answer(line.rule(),
-                            OfficeDeed.Answer.ACCEPTED, reason.getText(), Optional.ofNullable(until.getValue()))),
-                    button("shelve-" + line.rule().code(), "office.story.shelve", () -> model.answer(line.rule(),
-                            OfficeDeed.Answer.SHELVED, reason.getText(), Optional.ofNullable(until.getValue()))));
+                    button("accept-" + line.rule().code(), "office.story.accept", () -> until.read(day ->
+                            model.answer(line.rule(), OfficeDeed.Answer.ACCEPTED, reason.getText(), day))),
+                    button("shelve-" + line.rule().code(), "office.story.shelve", () -> until.read(day ->
+                            model.answer(line.rule(), OfficeDeed.Answer.SHELVED, reason.getText(), day))));
         }
         return row;
+    }
+
+    private String until(Answered answered) {
+        return answered.until().map(day -> wording.text("office.story.until.day", wording.day(day)))
+                .orElseGet(() -> wording.text("office.story.until.open"));
     }
 
     private ActionButton button(String id, String key, Runnable action) {
@@ -187,7 +189,7 @@ final class ZoneStoryView extends ScrollPane {
         VBox box = section("office.story.actions");
         for (OfficeDeed.ActionSet action : story.actions()) {
             Label words = Texts.wrapped(wording.text("office.story.action", action.text(), action.owner().isBlank()
-                    ? "–" : action.owner(), action.due().map(LocalDate::toString).orElse("–"),
+                    ? "–" : action.owner(), action.due().map(wording::day).orElse("–"),
                     action.workOrder().isBlank() ? "–" : action.workOrder()));
             words.setMinWidth(0);
             words.setMaxWidth(Double.MAX_VALUE);
@@ -201,12 +203,10 @@ final class ZoneStoryView extends ScrollPane {
         TextField text = field("action-text", "office.story.what");
         TextField owner = field("action-owner", "office.story.owner");
         TextField order = field("action-order", "office.story.order");
-        DatePicker due = new DatePicker();
-        due.setId("action-due");
-        due.setPromptText(wording.text("office.story.due"));
-        due.setAccessibleText(wording.text("office.story.due"));
+        DayField due = new DayField(wording, "action-due", wording.text("office.story.due"),
+                new SimpleStringProperty(""));
         FlowPane form = new FlowPane(text, owner, due, order, button("action-add", "office.story.add", () ->
-                model.act(text.getText(), owner.getText(), Optional.ofNullable(due.getValue()), order.getText())));
+                due.read(day -> model.act(text.getText(), owner.getText(), day, order.getText()))));
         form.getStyleClass().add("action-form");
         box.getChildren().add(form);
         return box;

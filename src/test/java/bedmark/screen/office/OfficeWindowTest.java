@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
+import bedmark.office.Answered;
 import bedmark.office.Offices;
 import bedmark.office.RankedZone;
 import bedmark.screen.Glass;
@@ -12,16 +13,21 @@ import bedmark.survey.Bundle;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.LocalDate;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.scene.Node;
 import javafx.scene.control.ListView;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
+import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** The office's screens, driven by clicks and keys on a headless glass. */
 class OfficeWindowTest {
@@ -122,6 +128,65 @@ class OfficeWindowTest {
             assertEquals("Set the boards wider", window.desk().store().actions().get(0).text());
             window.click("back");
             assertFalse(window.desk().store().ranked(worst.zone()).orElseThrow().answers().isEmpty());
+        }
+    }
+
+    private RankedZone worst(OfficeWindow window) throws Exception {
+        receiveAll(window);
+        RankedZone worst = window.desk().store().rank().get(0);
+        Glass.on(() -> {
+            window.shell().zone(worst.zone());
+            return null;
+        });
+        window.until(() -> window.words().contains("Too few surveys to say"));
+        return worst;
+    }
+
+    private static List<Answered> answers(OfficeWindow window, RankedZone zone) {
+        return window.desk().store().ranked(zone.zone()).orElseThrow().answers();
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"2027-01-31", "31.1.2027", "31 Jan 2027"})
+    void aTypedDayCountsWithoutBeingConfirmedFirst(String typed) throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            RankedZone worst = worst(window);
+            window.click("reason");
+            window.type("boards are on order");
+            window.click("until");
+            window.type(typed);
+            window.click("accept-" + worst.findings().get(0).rule().code());
+            assertEquals(Optional.of(LocalDate.of(2027, 1, 31)), answers(window, worst).get(0).until());
+            assertTrue(window.words().contains("Accepted by Ida Marsh, until 31 Jan 2027"), window.words());
+            window.click("action-text");
+            window.type("Set the boards wider");
+            window.click("action-due");
+            window.type(typed);
+            window.click("action-add");
+            assertEquals(Optional.of(LocalDate.of(2027, 1, 31)), window.desk().store().actions().get(0).due());
+            assertTrue(window.words().contains("due 31 Jan 2027"), window.words());
+        }
+    }
+
+    @Test
+    void whatIsNoDayIsRefusedAtItsFieldAndNothingIsAccepted() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            RankedZone worst = worst(window);
+            String rule = worst.findings().get(0).rule().code();
+            window.click("reason");
+            window.type("boards are on order");
+            window.click("until");
+            window.type("next week");
+            window.robot().push(KeyCode.ENTER);
+            window.click("accept-" + rule);
+            assertTrue(window.words().contains("\"next week\" is no day that can be read here"), window.words());
+            assertEquals("next week", ((TextField) window.node("until")).getText());
+            assertTrue(answers(window, worst).isEmpty());
+            window.click("until");
+            window.robot().push(KeyCode.SHORTCUT, KeyCode.A);
+            window.robot().push(KeyCode.DELETE);
+            window.click("accept-" + rule);
+            assertTrue(window.words().contains("Accepted by Ida Marsh, without an end"), window.words());
         }
     }
 

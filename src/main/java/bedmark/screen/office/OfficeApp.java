@@ -42,7 +42,10 @@ public final class OfficeApp extends Application {
     @Override
     public void start(Stage stage) {
         Launch given = launch.orElseThrow();
-        shell = show(stage, new OfficeDesk(given.store(), given.clock(), Platform::runLater, new StageChoice(stage)));
+        OfficeDesk desk = new OfficeDesk(given.store(), given.clock(), Platform::runLater, new StageChoice(stage));
+        Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> desk.failed(failure));
+        Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> desk.failed(failure));
+        shell = show(stage, desk);
         stage.setTitle("Bedmark");
         stage.show();
     }

@@ -1,5 +1,6 @@
 package bedmark.screen.office;
 
+import bedmark.diary.Diary;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.journal.NotSaved;
@@ -13,7 +14,9 @@ import bedmark.words.Words;
 import java.time.Clock;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.Executor;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -36,12 +39,14 @@ public final class OfficeDesk implements AutoCloseable {
     private final Executor screen;
     private final FolderChoice folders;
     private final PreferencesFile file;
+    private final Diary diary;
     private final ObjectProperty<Preferences> preferences;
     private final DoubleProperty progress = new SimpleDoubleProperty(-1);
     private final ReadOnlyObjectWrapper<Optional<Defect>> trouble = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyObjectWrapper<List<Defect>> found;
     private final ReadOnlyIntegerWrapper changes = new ReadOnlyIntegerWrapper();
-    private final AtomicBoolean stop = new AtomicBoolean();
+    /** The work under way and what waits for it. */
+    private final Set<Telling> under = ConcurrentHashMap.newKeySet();
     private final AtomicBoolean closed = new AtomicBoolean();
     private final ExecutorService work = Executors.newSingleThreadExecutor(run -> {
         Thread thread = new Thread(run, "office-work");
@@ -62,6 +67,7 @@ public final class OfficeDesk implements AutoCloseable {
         this.folders = folders;
         this.found = new ReadOnlyObjectWrapper<>(store.found());
         this.file = new PreferencesFile(store.folder());
+        this.diary = new Diary(store.folder(), clock);
         this.preferences = new SimpleObjectProperty<>(file.read());
         preferences.addListener((property, before, now) -> file.write(now));
     }
@@ -120,9 +126,9 @@ public final class OfficeDesk implements AutoCloseable {
         return changes.getReadOnlyProperty();
     }
 
-    /** Stops the work under way as soon as it can stop, leaving nothing half done. */
+    /** Stops the work under way, and what waits for it, as soon as it can stop, leaving nothing half done. */
     public void cancel() {
-        stop.set(true);
+        under.forEach(one -> one.stop.set(true));
     }
 
     /** Does something on the screen's thread as soon as that is free. */
@@ -145,13 +151,14 @@ public final class OfficeDesk implements AutoCloseable {
             return;
         }
         progress.set(0);
-        stop.set(false);
+        Telling telling = new Telling();
+        under.add(telling);
         work.execute(() -> {
             if (closed.get()) {
                 return;
             }
             try {
-                T result = task.apply(new Telling());
+                T result = task.apply(telling);
                 screen.execute(() -> {
                     progress.set(-1);
                     trouble.set(Optional.empty());
@@ -164,19 +171,35 @@ public final class OfficeDesk implements AutoCloseable {
                 failed(e.defect());
             } catch (NotSaved e) {
                 failed(e.defect());
+            } catch (RuntimeException | Error e) {
+                failed(e);
+            } finally {
+                under.remove(telling);
             }
         });
+    }
+
+    /** Says what went wrong; called on the screen's thread. */
+    void tell(Defect defect) {
+        trouble.set(Optional.of(defect));
+    }
+
+    /** Notes in the diary what nobody expected to fail, and says so. */
+    void failed(Throwable failure) {
+        diary.note(failure);
+        failed(Defect.in("", "office-work-failed", failure.getClass().getSimpleName()));
     }
 
     private void failed(Defect defect) {
         screen.execute(() -> {
             progress.set(-1);
-            trouble.set(Optional.of(defect));
+            tell(defect);
         });
     }
 
     /** Tells the screen how far work is, at most once for every hundredth. */
     private final class Telling implements Progress {
+        private final AtomicBoolean stop = new AtomicBoolean();
         private long last = -1;
 
         @Override
@@ -200,7 +223,7 @@ public final class OfficeDesk implements AutoCloseable {
         if (closed.getAndSet(true)) {
             return;
         }
-        stop.set(true);
+        cancel();
         CompletableFuture<Void> done = CompletableFuture.runAsync(store::close, work);
         work.shutdown();
         done.join();

@@ -1,5 +1,6 @@
 package bedmark.screen.office;
 
+import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.journal.Progress;
 import bedmark.office.PackFolder;
@@ -31,6 +32,10 @@ public final class ReceiveModel {
     });
     private volatile Optional<PackFolder> folder = Optional.empty();
 
+    /** What came of packs, and why the first receipt could not be written that was not. */
+    private record Came(List<Received> packs, Optional<Defect> unwritten) {
+    }
+
     /** A model at a desk; packs that came before it are not told of. */
     public ReceiveModel(OfficeDesk desk) {
         this.desk = desk;
@@ -46,7 +51,7 @@ public final class ReceiveModel {
         return watched.getReadOnlyProperty();
     }
 
-    /** Watches a folder from now on; nothing ends the watch. */
+    /** Watches a folder from now on; nothing ends the watch, as does whatever keeps packs of it from coming in. */
     public void watch(Optional<Path> chosen) {
         folder = chosen.map(PackFolder::new);
         watched.set(chosen);
@@ -57,11 +62,25 @@ public final class ReceiveModel {
         try {
             List<Path> whole = folder.map(PackFolder::look).orElse(List.of());
             if (!whole.isEmpty()) {
-                desk.onScreen(() -> desk.change(progress -> take(whole, progress), this::show));
+                desk.onScreen(() -> desk.change(progress -> takeAll(whole, progress), this::show));
             }
         } catch (Refused e) {
             // The folder is gone; it may come back, and is looked for again.
             return;
+        }
+    }
+
+    /** Where not all of them came in, the watch ends: whoever begins it anew is given them once more. */
+    private Came takeAll(List<Path> whole, Progress progress) {
+        boolean all = false;
+        try {
+            Came came = take(whole, progress);
+            all = came.packs().size() == whole.size();
+            return came;
+        } finally {
+            if (!all) {
+                desk.onScreen(() -> watch(Optional.empty()));
+            }
         }
     }
 
@@ -85,21 +104,23 @@ public final class ReceiveModel {
         });
     }
 
-    private List<Received> take(List<Path> files, Progress progress) {
-        List<Received> came = desk.store().receive(files, desk.person(), progress);
-        came.forEach(one -> one.confirmed().ifPresent(receipt -> {
+    private Came take(List<Path> files, Progress progress) {
+        List<Received> packs = desk.store().receive(files, desk.person(), progress);
+        List<Defect> unwritten = new ArrayList<>();
+        packs.forEach(one -> one.confirmed().ifPresent(receipt -> {
             try {
                 desk.store().write(receipt, one.file().toAbsolutePath().getParent());
             } catch (Refused e) {
                 // The pack is in; the same pack received again writes its receipt again.
-                return;
+                unwritten.add(e.defect());
             }
         }));
-        return came;
+        return new Came(packs, unwritten.stream().findFirst());
     }
 
-    private void show(List<Received> came) {
-        came.forEach(one -> received.add(0, one));
+    private void show(Came came) {
+        came.packs().forEach(one -> received.add(0, one));
+        came.unwritten().ifPresent(desk::tell);
     }
 
     /** Watches no folder any more. */

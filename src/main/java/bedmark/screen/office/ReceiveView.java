@@ -36,6 +36,7 @@ final class ReceiveView extends VBox {
         getChildren().addAll(dropPlace(desk, listening), scroll);
         ListChangeListener<Received> shown = change -> show();
         model.received().addListener(shown);
+        listening.onEnd(() -> model.received().removeListener(shown));
         show();
     }
 

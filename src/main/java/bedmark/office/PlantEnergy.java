@@ -20,7 +20,7 @@ public final class PlantEnergy {
      * @param name    conveyor's tag, or area
      * @param wh      energy of the zones that could be judged (Wh in a year)
      * @param shaft   whether any of it is counted at the shaft, since a motor's efficiency is not known
-     * @param cost    where a price is known for all of it, in the site's currency
+     * @param cost    where a price in one currency is known for all of it
      * @param co2     where it is known for all of it (kg)
      * @param savedWh by the best remedy of each zone (Wh in a year)
      * @param savedCost of that, where a price is known for all of it
@@ -59,17 +59,24 @@ public final class PlantEnergy {
 
     private static Bar bar(List<RankedZone> all, String name) {
         List<RankedZone> group = all.stream().filter(zone -> zone.energyWh().isPresent()).toList();
+        Optional<String> currency = currency(group);
         List<String> areas = all.stream().map(zone -> zone.names().area()).distinct().toList();
         return new Bar(all.get(0).names().plant(), areas.size() == 1 ? areas.get(0) : "", name,
                 group.stream().mapToDouble(zone -> zone.energyWh().getAsDouble()).sum(),
                 group.stream().anyMatch(zone -> zone.energyKind().filter("shaft"::equals).isPresent()),
-                sum(group, RankedZone::cost), sum(group, RankedZone::co2), group.stream()
-                        .flatMap(zone -> zone.currency().stream()).findFirst(),
+                currency.isPresent() ? sum(group, RankedZone::cost) : OptionalDouble.empty(),
+                sum(group, RankedZone::co2), currency,
                 group.stream().mapToDouble(zone -> zone.saving().map(Saving::wh).orElse(0.0)).sum(),
-                sum(group.stream().filter(zone -> zone.saving().isPresent()).toList(), zone ->
-                        zone.saving().get().cost()),
+                currency.isPresent() ? sum(group.stream().filter(zone -> zone.saving().isPresent()).toList(), zone ->
+                        zone.saving().get().cost()) : OptionalDouble.empty(),
                 group.stream().filter(zone -> zone.saving().isPresent()).max(Comparator.comparingDouble(zone ->
                         zone.saving().get().wh())), group.size(), all.size() - group.size());
+    }
+
+    /** The one currency of all that has a price: money of two is not added. */
+    private static Optional<String> currency(List<RankedZone> zones) {
+        List<String> currencies = zones.stream().flatMap(zone -> zone.currency().stream()).distinct().toList();
+        return currencies.size() == 1 ? Optional.of(currencies.get(0)) : Optional.empty();
     }
 
     private static OptionalDouble sum(List<RankedZone> zones, Function<RankedZone, OptionalDouble> number) {

@@ -13,6 +13,7 @@ import bedmark.report.paper.Photograph;
 import bedmark.wording.Telling;
 import bedmark.wording.Told;
 import bedmark.wording.ZoneSketcher;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
@@ -29,6 +30,9 @@ final class WorstPages {
     /** What a card takes beside its picture. */
     private static final double TEXTS = 158;
     private static final double BESIDE = 12;
+    /** Of the room beside the picture; the photo has the rest. */
+    private static final double CAPTION_AT_MOST = 0.35;
+    private static final String ELLIPSIS = "…";
 
     private final ReportContent content;
     private final ReportWords words;
@@ -170,7 +174,7 @@ final class WorstPages {
 
     private void photo(Photo photo, double x, double top, double width) {
         Lettering small = Lettering.plain(8).soft();
-        List<String> caption = photo.caption().isEmpty() ? List.of() : flow.broken(photo.caption(), small, width);
+        List<String> caption = photo.caption().isEmpty() ? List.of() : caption(photo.caption(), small, width);
         double room = high - caption.size() * small.leading() - 3;
         double aspect = photo.photograph().aspect();
         double wide = Math.min(width, room * aspect);
@@ -182,6 +186,22 @@ final class WorstPages {
                 flow.leaf().write(caption.get(i), small, x, top + tall + 3 + i * small.leading() + small.rise());
             }
         });
+    }
+
+    /** As many lines as leave the photo most of the room. */
+    private List<String> caption(String text, Lettering small, double width) {
+        List<String> lines = flow.broken(text, small, width);
+        int most = (int) (high * CAPTION_AT_MOST / small.leading());
+        if (lines.size() <= most) {
+            return lines;
+        }
+        List<String> some = new ArrayList<>(lines.subList(0, most));
+        String last = some.get(most - 1);
+        while (flow.measured(last + ELLIPSIS, small) > width) {
+            last = last.substring(0, last.offsetByCodePoints(last.length(), -1));
+        }
+        some.set(most - 1, last.stripTrailing() + ELLIPSIS);
+        return some;
     }
 
     private void figures(Told told) {

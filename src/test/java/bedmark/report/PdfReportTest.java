@@ -5,12 +5,16 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import bedmark.document.Branch;
+import bedmark.document.Node;
 import bedmark.engine.Result;
 import bedmark.journal.Progress;
 import bedmark.office.OfficeStore;
+import bedmark.office.Offices;
 import bedmark.office.Place;
 import bedmark.quantity.UnitSystem;
 import bedmark.report.paper.PaperSize;
+import bedmark.survey.Bundle;
 import bedmark.wording.Telling;
 import bedmark.wording.Told;
 import bedmark.wording.Wording;
@@ -35,6 +39,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
 class PdfReportTest {
+    private static final int CAPTION_WORDS = 200;
+
     @TempDir
     static Path folder;
     private static OfficeStore store;
@@ -81,6 +87,28 @@ class PdfReportTest {
     void everyZoneStandsInItWithItsNumbers() throws IOException {
         check(english, new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC), "Working of ");
         check(spanish, new Wording(new Words(Reports.SPANISH), UnitSystem.US), "Cálculo de ");
+    }
+
+    @Test
+    void aLongCaptionLeavesThePhotoItsRoom(@TempDir Path beside) throws IOException {
+        Path tablet = beside.resolve("tablet");
+        Branch round = Offices.sample("round-under-way").document();
+        List<Node> surveys = round.branches("surveys").stream().<Node>map(survey -> survey.with("photos",
+                new Node.Series(survey.branches("photos").stream().<Node>map(photo -> photo.with("caption",
+                        "spillage ".repeat(CAPTION_WORDS).strip())).toList()))).toList();
+        try (OfficeStore other = Offices.trusting(beside.resolve("office"), tablet)) {
+            other.receive(List.of(Offices.pack(new Bundle(round.with("surveys", new Node.Series(surveys))), tablet,
+                    beside.resolve("round.zip"))), "Ida Marsh", Progress.NONE);
+            byte[] pdf = Reports.pdf(Reports.content(other), Reports.options(Locale.ENGLISH, UnitSystem.METRIC,
+                    PaperSize.A4, Reports.photos(other)));
+            List<String> captioned = pages(pdf).stream().filter(page -> page.contains("spillage spillage")).toList();
+            assertFalse(captioned.isEmpty());
+            for (String page : captioned) {
+                int words = page.split("spillage", -1).length - 1;
+                assertTrue(words < CAPTION_WORDS, () -> "the whole caption: " + words + " words");
+                assertTrue(Pattern.compile("spi?l?l?a?g?e?…").matcher(page).find(), page);
+            }
+        }
     }
 
     private static void check(byte[] pdf, Wording wording, String working) throws IOException {

@@ -44,10 +44,18 @@ public final class ZoneStoryModel {
     }
 
     private void change(Runnable change) {
+        change(change, () -> { });
+    }
+
+    /** @param then what is done on the screen once it is kept */
+    private void change(Runnable change, Runnable then) {
         desk.change(progress -> {
             change.run();
             return read();
-        }, story::set);
+        }, read -> {
+            then.run();
+            story.set(read);
+        });
     }
 
     public ReadOnlyObjectProperty<Optional<Story>> storyProperty() {
@@ -70,9 +78,13 @@ public final class ZoneStoryModel {
         change(() -> new Findings(desk.store()).settle(zone, digest, reason, desk.person()));
     }
 
-    /** Writes an action down. */
-    public void act(String text, String owner, Optional<LocalDate> due, String workOrder) {
-        change(() -> new Actions(desk.store()).add(zone, "", text, owner, due, workOrder, desk.person()));
+    /**
+     * Writes an action down.
+     *
+     * @param then what is done on the screen once it is kept
+     */
+    public void act(String text, String owner, Optional<LocalDate> due, String workOrder, Runnable then) {
+        change(() -> new Actions(desk.store()).add(zone, "", text, owner, due, workOrder, desk.person()), then);
     }
 
     /** An action was done. */

@@ -22,8 +22,10 @@ import java.time.Instant;
 import java.time.ZoneOffset;
 import java.util.Optional;
 import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
+import javafx.scene.Scene;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
@@ -43,6 +45,12 @@ final class ZoneStoryView extends ScrollPane {
     private final VBox content = new VBox();
     private final TextField reason = new TextField();
     private final DayField until;
+    private final TextField actionText;
+    private final TextField actionOwner;
+    private final TextField actionOrder;
+    private final StringProperty due = new SimpleStringProperty("");
+    private final DayField actionDue;
+    private final TextField clashReason;
     private Measure measure = Measure.DEPTH;
 
     ZoneStoryView(OfficeDesk desk, ZoneStoryModel model, Listening listening, Runnable back) {
@@ -55,10 +63,27 @@ final class ZoneStoryView extends ScrollPane {
         setFitToWidth(true);
         reason.setId("reason");
         until = new DayField(wording, "until", wording.text("office.story.until"), new SimpleStringProperty(""));
+        actionText = field("action-text", "office.story.what");
+        actionOwner = field("action-owner", "office.story.owner");
+        actionOrder = field("action-order", "office.story.order");
+        actionDue = new DayField(wording, "action-due", wording.text("office.story.due"), due);
+        clashReason = field("clash-reason", "office.story.reason");
         listening.to(model.storyProperty(), story -> show());
     }
 
     private void show() {
+        Optional<Node> focused = Optional.ofNullable(getScene()).map(Scene::getFocusOwner).filter(this::holds);
+        fill();
+        // The screen is made anew around the person, who goes on where they were.
+        focused.ifPresent(one -> Optional.ofNullable(one.getId()).map(id -> content.lookup("#" + id)).orElse(this)
+                .requestFocus());
+    }
+
+    private boolean holds(Node node) {
+        return node != null && (node == content || holds(node.getParent()));
+    }
+
+    private void fill() {
         content.getChildren().clear();
         model.storyProperty().get().ifPresent(story -> content.getChildren().addAll(head(story), chart(story),
                 findings(story), actions(story)));
@@ -200,16 +225,20 @@ final class ZoneStoryView extends ScrollPane {
             row.setAlignment(Pos.CENTER_LEFT);
             box.getChildren().add(row);
         }
-        TextField text = field("action-text", "office.story.what");
-        TextField owner = field("action-owner", "office.story.owner");
-        TextField order = field("action-order", "office.story.order");
-        DayField due = new DayField(wording, "action-due", wording.text("office.story.due"),
-                new SimpleStringProperty(""));
-        FlowPane form = new FlowPane(text, owner, due, order, button("action-add", "office.story.add", () ->
-                due.read(day -> model.act(text.getText(), owner.getText(), day, order.getText()))));
+        FlowPane form = new FlowPane(actionText, actionOwner, actionDue, actionOrder, button("action-add",
+                "office.story.add", () -> actionDue.read(day -> model.act(actionText.getText(), actionOwner.getText(),
+                day, actionOrder.getText(), this::added))));
         form.getStyleClass().add("action-form");
         box.getChildren().add(form);
         return box;
+    }
+
+    /** What was typed has become an action; before that it stays, whatever else is decided. */
+    private void added() {
+        actionText.clear();
+        actionOwner.clear();
+        due.set("");
+        actionOrder.clear();
     }
 
     private TextField field(String id, String key) {
@@ -222,8 +251,7 @@ final class ZoneStoryView extends ScrollPane {
 
     private Node clashes(Story story) {
         VBox box = section("office.story.clashes");
-        TextField why = field("clash-reason", "office.story.reason");
-        box.getChildren().add(why);
+        box.getChildren().add(clashReason);
         for (Clash clash : story.clashes()) {
             FlowPane sides = new FlowPane();
             sides.getStyleClass().add("sides");
@@ -231,7 +259,7 @@ final class ZoneStoryView extends ScrollPane {
                 VBox card = new VBox(Texts.wrapped(wording.text("office.story.side", side.revision(),
                         Instant.ofEpochMilli(side.moment()).atZone(ZoneOffset.UTC).toLocalDate(),
                         side.digest().substring(0, 12))), button("settle-" + side.digest().substring(0, 12),
-                        "office.story.counts", () -> model.settle(side.digest(), why.getText())));
+                        "office.story.counts", () -> model.settle(side.digest(), clashReason.getText())));
                 card.getStyleClass().add("side-card");
                 sides.getChildren().add(card);
             }

@@ -169,6 +169,27 @@ class OfficeWindowTest {
     }
 
     @Test
+    void whatIsTypedForAnActionStaysWhileAFindingIsAnswered() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            RankedZone worst = worst(window);
+            window.click("action-text");
+            window.type("Set the boards wider");
+            window.click("action-due");
+            window.type("2027-01-31");
+            window.click("reason");
+            window.type("boards are on order");
+            window.click("accept-" + worst.findings().get(0).rule().code());
+            assertTrue(window.words().contains("Accepted by Ida Marsh"), window.words());
+            assertEquals("Set the boards wider", ((TextField) window.node("action-text")).getText());
+            assertEquals("2027-01-31", ((TextField) window.node("action-due")).getText());
+            window.click("action-add");
+            assertTrue(window.words().contains("due 31 Jan 2027"), window.words());
+            assertEquals("", ((TextField) window.node("action-text")).getText());
+            assertEquals("", ((TextField) window.node("action-due")).getText());
+        }
+    }
+
+    @Test
     void whatIsNoDayIsRefusedAtItsFieldAndNothingIsAccepted() throws Exception {
         try (OfficeWindow window = window(1280, 800)) {
             RankedZone worst = worst(window);

@@ -1,6 +1,5 @@
 package bedmark.command;
 
-import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.wording.Wording;
 import java.nio.file.Files;

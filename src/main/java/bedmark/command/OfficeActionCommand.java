@@ -20,7 +20,8 @@ import picocli.CommandLine.Spec;
 /** Writes an action down, changes one, or lists all as CSV. */
 @Command(name = "action", mixinStandardHelpOptions = true,
         description = "Writes down what is to be done at a transfer point; without one, lists all as CSV.",
-        footer = {"", "Exit codes: 0 written down or listed; 2 bad use; 3 no such zone or action, or unreadable store."})
+        footer = {"", "Exit codes: 0 written down or listed; 2 bad use; 3 no such zone or action, or unreadable "
+                + "store."})
 final class OfficeActionCommand implements Callable<Integer> {
     private final Surroundings surroundings;
 
@@ -92,7 +93,8 @@ final class OfficeActionCommand implements Callable<Integer> {
     }
 
     private boolean anythingGiven() {
-        return done || zones.given() || due.isPresent() || Stream.of(text, finding, owner, workOrder).anyMatch(Optional::isPresent);
+        return done || zones.given() || due.isPresent()
+                || Stream.of(text, finding, owner, workOrder).anyMatch(Optional::isPresent);
     }
 
     private void require(boolean met, String otherwise) {

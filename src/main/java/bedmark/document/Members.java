@@ -157,25 +157,13 @@ public final class Members extends AbstractMap<String, Node> {
         for (int i = 1; i < keys.length; i++) {
             if (keys[i - 1].compareTo(keys[i]) > 0) {
                 String[] sorted = keys.clone();
-                Node[] beside = values.clone();
-                sort(sorted, beside, i);
+                Arrays.sort(sorted);
+                Node[] beside = new Node[sorted.length];
+                Arrays.setAll(beside, each -> get(sorted[each]));
                 return new Members(sorted, beside);
             }
         }
         return this;
-    }
-
-    /** Puts each from a place on where it belongs among those before it: most objects are small. */
-    private static void sort(String[] keys, Node[] values, int from) {
-        for (int i = from; i < keys.length; i++) {
-            String key = keys[i];
-            Node value = values[i];
-            int place = -1 - Arrays.binarySearch(keys, 0, i, key);
-            System.arraycopy(keys, place, keys, place + 1, i - place);
-            System.arraycopy(values, place, values, place + 1, i - place);
-            keys[place] = key;
-            values[place] = value;
-        }
     }
 
     /** The members as a quantity: what they were read as before, else what the reader makes of them now. */

@@ -93,6 +93,7 @@ public record FindingLine(Rule rule, Optional<Seen> today, Optional<Seen> atDesi
                 .reduce((one, other) -> one.level.compareTo(other.level) >= 0 ? one : other).orElseThrow();
     }
 
+    /** At the feed at which it is worse. */
     public Level level() {
         return worst().level;
     }

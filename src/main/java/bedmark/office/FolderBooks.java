@@ -198,10 +198,9 @@ final class FolderBooks implements Books {
 
     @Override
     public List<Optional<Entry>> keep(List<Deed> deeds) {
-        List<Boolean> needless = ask(() -> deeds.stream().map(deed -> effect.needless(tables(), deed)).toList());
-        ask(() -> {
+        List<Boolean> needless = ask(() -> {
             deeds.forEach(deed -> effect.prove(tables(), deed));
-            return true;
+            return deeds.stream().map(deed -> effect.needless(tables(), deed)).toList();
         });
         effect.prepare(IntStream.range(0, deeds.size()).filter(i -> !needless.get(i)).mapToObj(deeds::get).toList());
         List<Optional<Entry>> kept = new ArrayList<>();

@@ -73,8 +73,8 @@ public final class PlantEnergy {
                         zone.saving().get().wh())), group.size(), all.size() - group.size());
     }
 
-    /** The one currency of all that has a price: money of two is not added. */
-    private static Optional<String> currency(List<RankedZone> zones) {
+    /** The one currency of all zones that have a price; nothing where there are two, since their money is not added. */
+    public static Optional<String> currency(List<RankedZone> zones) {
         List<String> currencies = zones.stream().flatMap(zone -> zone.currency().stream()).distinct().toList();
         return currencies.size() == 1 ? Optional.of(currencies.get(0)) : Optional.empty();
     }

@@ -32,7 +32,7 @@ import java.util.OptionalDouble;
  * @param findings    what is not within its limits
  * @param answers     the findings among them that were accepted or shelved and stay away
  * @param clashes     contents that can't all be right, and wait for a person
- * @param clockWrong  whether a tablet's clock can't have been right: out of order, or ahead of the office's by days
+ * @param clockWrong  whether a tablet's clock can't have been right: out of order, or ahead of the office's by a day
  */
 public record RankedZone(ZoneNames names, Place place, Optional<Level> level, Optional<String> survey,
                          Optional<Instant> surveyed, Optional<Duration> age, boolean stale,

@@ -177,10 +177,9 @@ final class Ranking {
         boolean clockWrong = standing.clockWrong() || surveyed.filter(this::ahead).isPresent()
                 || visited.filter(this::ahead).isPresent();
         return new RankedZone(row.names(), ordered.place, level, standing.latest(), surveyed, age(surveyed),
-                stale(surveyed),
-                standing.visitStatus(), visited, verdict.driveShare(), verdict.skirtPower(), verdict.energyWh(),
-                verdict.cost(), verdict.co2(), verdict.energyKind(), verdict.currency(), saving(verdict),
-                FindingLine.read(verdict.findings()), ordered.held, standing.clashes(), clockWrong);
+                stale(surveyed), standing.visitStatus(), visited, verdict.driveShare(), verdict.skirtPower(),
+                verdict.energyWh(), verdict.cost(), verdict.co2(), verdict.energyKind(), verdict.currency(),
+                saving(verdict), FindingLine.read(verdict.findings()), ordered.held, standing.clashes(), clockWrong);
     }
 
     private static Optional<Saving> saving(Verdict verdict) {

@@ -1,5 +1,6 @@
 package bedmark.report;
 
+import bedmark.office.PlantEnergy;
 import bedmark.office.RankedZone;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -45,8 +46,8 @@ public record ConveyorEnergy(String plant, String area, String conveyor, int kno
 
     private static ConveyorEnergy of(List<RankedZone> all) {
         List<RankedZone> known = all.stream().filter(zone -> zone.energyWh().isPresent()).toList();
-        List<String> currencies = known.stream().flatMap(zone -> zone.currency().stream()).distinct().toList();
-        boolean priced = currencies.size() == 1 && !known.isEmpty()
+        Optional<String> currency = PlantEnergy.currency(known);
+        boolean priced = currency.isPresent()
                 && known.stream().allMatch(zone -> zone.cost().isPresent() && zone.currency().isPresent());
         boolean weighed = !known.isEmpty() && known.stream().allMatch(zone -> zone.co2().isPresent());
         List<String> areas = all.stream().map(zone -> zone.names().area()).distinct().toList();
@@ -58,7 +59,7 @@ public record ConveyorEnergy(String plant, String area, String conveyor, int kno
                         : OptionalDouble.empty(),
                 weighed ? OptionalDouble.of(known.stream().mapToDouble(zone -> zone.co2().getAsDouble()).sum())
                         : OptionalDouble.empty(),
-                priced ? Optional.of(currencies.get(0)) : Optional.empty(),
+                priced ? currency : Optional.empty(),
                 known.stream().anyMatch(zone -> zone.energyKind().filter("shaft"::equals).isPresent()));
     }
 }

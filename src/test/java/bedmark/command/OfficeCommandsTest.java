@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.command.Terminal.Result;
+import bedmark.document.Branch;
 import bedmark.json.JsonReader;
 import bedmark.office.Offices;
 import java.io.IOException;
@@ -36,6 +37,10 @@ class OfficeCommandsTest {
         all.addAll(List.of(arguments));
         all.addAll(List.of("--store", folder.resolve("office").toString()));
         return Terminal.run(all.toArray(String[]::new));
+    }
+
+    private Branch worst() {
+        return JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8)).root();
     }
 
     private Result received() {
@@ -80,10 +85,9 @@ class OfficeCommandsTest {
     @Test
     void aFindingIsAcceptedWithReasonPersonAndDay() {
         received();
-        String worst = JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8))
-                .root().text("transfer").orElseThrow();
-        String rule = JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8))
-                .root().branches("findings").get(0).text("code").orElseThrow();
+        Branch first = worst();
+        String worst = first.text("transfer").orElseThrow();
+        String rule = first.branches("findings").get(0).text("code").orElseThrow();
         assertEquals(2, office("accept", worst, rule).code());
         assertEquals(3, office("accept", worst, rule, "--reason", "r", "--until", "2020-01-01").code());
         assertEquals(3, office("accept", worst, rule, "--reason", "r", "--shelve").code());
@@ -212,10 +216,9 @@ class OfficeCommandsTest {
     @Test
     void aFindingThatIsAcceptedForGoodIsToldWithoutADay() {
         received();
-        String worst = JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8))
-                .root().text("transfer").orElseThrow();
-        String rule = JsonReader.read(office("rank", "--json", "--limit", "1").out().getBytes(StandardCharsets.UTF_8))
-                .root().branches("findings").get(0).text("code").orElseThrow();
+        Branch first = worst();
+        String worst = first.text("transfer").orElseThrow();
+        String rule = first.branches("findings").get(0).text("code").orElseThrow();
         assertTrue(office("accept", worst, rule, "--reason", "r").out().contains("accepted until it is worse"));
         assertTrue(office("rank").out().lines().anyMatch(line -> line.endsWith("until it is worse: r")));
     }

@@ -2,7 +2,6 @@ package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
-import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
@@ -128,8 +127,9 @@ class AnsweredTest {
 
     /** The zone's last survey made once more, with a bed so many times as deep. */
     private static Bundle later(ZoneId zone, String day, double deeper) {
-        Branch last = BUNDLE.document().branches("surveys").stream().filter(survey ->
-                survey.text("transfer").equals(Optional.of(zone.transfer()))).reduce((one, other) -> other).orElseThrow();
+        Branch last = BUNDLE.document().branches("surveys").stream()
+                .filter(survey -> survey.text("transfer").equals(Optional.of(zone.transfer())))
+                .reduce((one, other) -> other).orElseThrow();
         Branch readings = last.branch("readings").orElseThrow();
         List<Node> depths = readings.branches("bedDepths").stream().map(station -> (Node) station.with("depth",
                 deeper(station.branch("depth").orElseThrow(), deeper))).toList();

@@ -28,6 +28,9 @@ class PlantEnergyTest {
     void moneyOfTwoCurrenciesIsNotAdded() {
         try (OfficeStore store = Offices.trusting(folder.resolve("office"), folder.resolve("tablet"))) {
             store.receive(pack("round-2026-03", "EUR"), "Ida Marsh");
+            Bar alike = bar(store, "Clinker load-out");
+            assertEquals(Optional.of("EUR"), alike.currency());
+            assertTrue(alike.cost().isPresent());
             store.receive(pack("round-under-way", "USD"), "Ida Marsh");
             // Of the load-out two zones were surveyed once more, the others were not.
             Bar mixed = bar(store, "Clinker load-out");

@@ -28,8 +28,8 @@ public record RegisterGrid(String list, List<String> keys, List<List<String>> ro
                 keys.stream().map(key -> RegisterTables.cell(row, key)).toList()).toList());
     }
 
-    /** The keys of a list that every row must have, the first of which can't be changed later. */
-    public static List<String> required(String list) {
+    /** The keys of a list that every row must have. */
+    private static List<String> required(String list) {
         return Column.LISTS.get(list).stream().filter(Column::required).map(Column::key).toList();
     }
 
@@ -41,13 +41,8 @@ public record RegisterGrid(String list, List<String> keys, List<List<String>> ro
     }
 
     /** The row that is known by that. */
-    public Optional<Integer> row(List<String> identity) {
+    Optional<Integer> row(List<String> identity) {
         return IntStream.range(0, rows.size()).filter(row -> identity(row).equals(identity)).boxed().findFirst();
-    }
-
-    /** As {@link #edit(int, Map)}, for one cell. */
-    public Table edit(int row, String key, String text) {
-        return edit(row, Map.of(key, text));
     }
 
     /**
@@ -56,7 +51,7 @@ public record RegisterGrid(String list, List<String> keys, List<List<String>> ro
      *
      * @param cells texts by key
      */
-    public Table edit(int row, Map<String, String> cells) {
+    Table edit(int row, Map<String, String> cells) {
         boolean fresh = row >= rows.size();
         List<Integer> taken = IntStream.range(0, keys.size()).filter(i -> cells.containsKey(keys.get(i))
                 || list.equals(Column.ROUNDS) || !fresh && required(list).contains(keys.get(i))).boxed().toList();

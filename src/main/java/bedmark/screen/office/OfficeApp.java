@@ -42,10 +42,7 @@ public final class OfficeApp extends Application {
     @Override
     public void start(Stage stage) {
         Launch given = launch.orElseThrow();
-        OfficeDesk desk = new OfficeDesk(given.store(), given.clock(), Platform::runLater, new StageChoice(stage));
-        Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> desk.failed(failure));
-        Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> desk.failed(failure));
-        shell = show(stage, desk);
+        shell = show(stage, new OfficeDesk(given.store(), given.clock(), Platform::runLater, new StageChoice(stage)));
         stage.setTitle("Bedmark");
         stage.show();
     }
@@ -57,6 +54,8 @@ public final class OfficeApp extends Application {
      * @return what the window must close when it is closed itself
      */
     public static OfficeShell show(Stage stage, OfficeDesk desk) {
+        Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> desk.failed(failure));
+        Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> desk.failed(failure));
         boolean sized = stage.getScene() != null;
         OfficeShell shell = new OfficeShell(desk, sized ? stage.getScene().getWidth() : WIDTH,
                 sized ? stage.getScene().getHeight() : HEIGHT);

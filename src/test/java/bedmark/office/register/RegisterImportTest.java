@@ -351,7 +351,7 @@ class RegisterImportTest {
         RegisterGrid grid = RegisterGrid.of(HEAD, "rounds");
         Branch round = HEAD.branches("rounds").get(0);
         for (Draft draft : List.of(changed("rounds", 0, "name", "Spring round"), RegisterImport.draft(HEAD,
-                List.of(grid.edit(0, "name", "Spring round")), Map.of()))) {
+                List.of(grid.edit(0, Map.of("name", "Spring round"))), Map.of()))) {
             assertEquals(List.of(), draft.defects());
             assertEquals(round.with("name", "Spring round"), draft.head().branches("rounds").get(0));
         }

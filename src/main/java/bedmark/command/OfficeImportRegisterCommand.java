@@ -28,10 +28,11 @@ import picocli.CommandLine.Parameters;
 
 /** Takes a register in from tables. */
 @Command(name = "import-register", mixinStandardHelpOptions = true,
-        description = {"Takes plants, areas, materials, conveyors, loading zones, rounds, limits and seal rates in.",
-            "CSV files are named after what they hold (areas.csv, materials.csv, conveyors.csv, transfers.csv,",
-            "rounds.csv, limits.csv, sealRates.csv), the sheets of a workbook likewise. A column's head is its key,",
-            "with the unit in brackets where the cells name none: beltWidth [mm]."},
+        description = {"Takes plants, areas, materials, conveyors, loading zones, rounds, limits, seal rates and",
+            "instruments in. CSV files are named after what they hold (plant.csv, areas.csv, materials.csv,",
+            "conveyors.csv, transfers.csv, rounds.csv, limits.csv, sealRates.csv, instruments.csv), the sheets of a",
+            "workbook likewise. A column's head is its key, with the unit in brackets where the cells name none:",
+            "beltWidth [mm]."},
         footer = {"", "Exit codes: 0 taken in; 3 something is wrong, each bad row is named and nothing was taken in;",
             "2 bad use."})
 final class OfficeImportRegisterCommand implements Callable<Integer> {

@@ -245,10 +245,15 @@ class OfficeCommandsTest {
     }
 
     @Test
-    void aZoneThatTwoPlantsHaveIsNamedWithItsPlant() {
+    void aZoneThatTwoPlantsHaveIsNamedWithItsPlant() throws IOException {
         received();
         String tables = folder.resolve("tables").toString();
         assertEquals(0, office("export-register", "--out", tables).code());
+        Result other = office("import-register", tables, "--plant", "westerly");
+        assertEquals(3, other.code());
+        assertTrue(other.err().contains("ostermere is not the plant whose register this is (westerly)"), other.err());
+        Path plant = folder.resolve("tables/plant.csv");
+        Files.writeString(plant, Files.readString(plant).replace("ostermere,", "westerly,"));
         Result second = office("import-register", tables, "--plant", "westerly");
         assertEquals(0, second.code(), second::err);
         for (String[] line : new String[][] {{"trend", "TP-08"}, {"action", "TP-08", "--text", "Renew the seals"},

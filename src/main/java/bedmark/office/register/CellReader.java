@@ -121,8 +121,8 @@ final class CellReader {
         if (unit.isEmpty()) {
             throw own.isEmpty() ? new Unfit("cell-unit-absent", text) : new Unfit("cell-unit-unknown", own);
         }
-        boolean share = kind.alsoShare() && unit.get().dimension() == Dimension.RATIO;
-        if (unit.get().dimension() != kind.dimension() && !share) {
+        Dimension found = unit.get().dimension();
+        if (found != kind.dimension() && !kind.other().equals(Optional.of(found))) {
             throw new Unfit("cell-unit-other", unit.get().code(), kind.dimension().code());
         }
         BigDecimal number = decimal(matcher.group(1));
@@ -132,7 +132,7 @@ final class CellReader {
         if (kind.sign() == Kind.Sign.NOT_NEGATIVE && number.signum() < 0) {
             throw new Unfit("cell-below", text, "0");
         }
-        if (kind.dimension() == Dimension.ANGLE && Math.abs(unit.get().toSi(number)) >= Math.PI / 2) {
+        if (found == Dimension.ANGLE && Math.abs(unit.get().toSi(number)) >= Math.PI / 2) {
             throw new Unfit("cell-angle-too-steep", text);
         }
         return Quantity.of(number, unit.get());

@@ -3,6 +3,7 @@ package bedmark.office.register;
 import bedmark.engine.flow.SpeedClass;
 import bedmark.engine.seal.SealCondition;
 import bedmark.engine.seal.SealType;
+import bedmark.engine.uncertainty.Instrument;
 import bedmark.engine.verdict.Rule;
 import bedmark.office.register.Kind.Measured;
 import bedmark.office.register.Kind.Sign;
@@ -21,6 +22,8 @@ import java.util.stream.Stream;
  * @param required whether each row must have it
  */
 record Column(String key, Kind kind, boolean required) {
+    static final String PLANT = "plant";
+    static final String INSTRUMENTS = "instruments";
     static final String ROUNDS = "rounds";
     static final String LIMITS = "limits";
     static final String SEAL_RATES = "sealRates";
@@ -30,6 +33,7 @@ record Column(String key, Kind kind, boolean required) {
 
     private static Map<String, List<Column>> lists() {
         Map<String, List<Column>> lists = new LinkedHashMap<>();
+        lists.put(PLANT, PlantSheet.COLUMNS);
         lists.put("areas", List.of(id(), text("name")));
         lists.put("materials", List.of(id(), text("name"), number("skirtFrictionFactor", false, null),
                 measured("bulkDensity", Dimension.DENSITY, Sign.POSITIVE),
@@ -45,7 +49,8 @@ record Column(String key, Kind kind, boolean required) {
                 measured("ratedPower", Dimension.POWER, Sign.POSITIVE), number("driveEfficiency", true, "1"),
                 number("motorEfficiency", true, "1"), number("loadedHoursPerYear", false, "8784"),
                 measured("beltLength", Dimension.LENGTH, Sign.POSITIVE),
-                new Column("skirtPowerBudget", new Measured(Dimension.POWER, Sign.POSITIVE, true), false),
+                new Column("skirtPowerBudget", new Measured(Dimension.POWER, Sign.POSITIVE,
+                        Optional.of(Dimension.RATIO)), false),
                 yesNo("fullySkirted")));
         lists.put("transfers", List.of(id(), text("tag"), text("assetId"),
                 new Column("area", new Kind.Reference("areas"), false),
@@ -68,6 +73,11 @@ record Column(String key, Kind kind, boolean required) {
                 new Column("condition", new Kind.Word(Stream.of(SealCondition.values()).map(SealCondition::code)
                         .toList()), true),
                 new Column("multiplier", new Kind.Number(BigDecimal.ZERO, false, Optional.empty()), true)));
+        lists.put(INSTRUMENTS, List.of(
+                new Column("kind", new Kind.Word(Stream.of(Instrument.values()).filter(one -> one != Instrument.EXACT)
+                        .map(Instrument::code).toList()), true),
+                new Column("standardUncertainty", new Measured(Dimension.LENGTH, Sign.NOT_NEGATIVE,
+                        Optional.of(Dimension.ANGLE)), false), number("relative", false, null)));
         return lists;
     }
 
@@ -76,33 +86,34 @@ record Column(String key, Kind kind, boolean required) {
         return switch (list) {
             case ROUNDS -> List.of("id", "transfer");
             case LIMITS -> List.of("rule");
+            case INSTRUMENTS -> List.of("kind");
             case SEAL_RATES -> List.of("type", "condition");
             default -> List.of("id");
         };
     }
 
-    private static Column id() {
+    static Column id() {
         return new Column("id", new Kind.Id(), true);
     }
 
-    private static Column text(String key) {
+    static Column text(String key) {
         return new Column(key, new Kind.Plain(), false);
     }
 
-    private static Column number(String key, boolean above, String most) {
+    static Column number(String key, boolean above, String most) {
         return new Column(key, new Kind.Number(BigDecimal.ZERO, above, Optional.ofNullable(most).map(BigDecimal::new)),
                 false);
     }
 
     private static Column measured(String key, Dimension dimension, Sign sign) {
-        return new Column(key, new Measured(dimension, sign, false), false);
+        return new Column(key, new Measured(dimension, sign, Optional.empty()), false);
     }
 
     private static Column yesNo(String key) {
         return new Column(key, new Kind.YesNo(), false);
     }
 
-    private static Column word(String key, List<String> words) {
+    static Column word(String key, List<String> words) {
         return new Column(key, new Kind.Word(words), false);
     }
 }

@@ -33,8 +33,8 @@ sealed interface Kind {
         ANY, NOT_NEGATIVE, POSITIVE
     }
 
-    /** @param alsoShare whether a share in percent may stand there too */
-    record Measured(Dimension dimension, Sign sign, boolean alsoShare) implements Kind {
+    /** @param other what may stand there too, such as a share in percent */
+    record Measured(Dimension dimension, Sign sign, Optional<Dimension> other) implements Kind {
     }
 
     /** Yes or no. */

@@ -53,49 +53,21 @@ public final class RegisterImport {
         this.before = before;
         this.renamed = renamed;
         this.emptying = emptying;
-        Branch plant = before.branch("plant").orElse(Branch.EMPTY);
         for (String list : Column.LISTS.keySet()) {
-            Map<String, Branch> rows = new LinkedHashMap<>();
-            held(plant, list).forEach(row -> rows.put(id(list, row), row));
+            Map<String, Branch> rows = RegisterLists.of(before, list);
             held.put(list, Map.copyOf(rows));
             lists.put(list, rows);
             places.put(list, new HashMap<>());
         }
     }
 
-    private List<Branch> held(Branch plant, String list) {
-        if (list.equals(Column.ROUNDS)) {
-            return before.branches("rounds");
-        } else if (list.equals(Column.LIMITS)) {
-            List<Branch> rows = new ArrayList<>();
-            plant.branch("limits").orElse(Branch.EMPTY).members().forEach((rule, limit) -> {
-                if (limit instanceof Branch branch && isRule(rule)) {
-                    rows.add(branch.with("rule", rule));
-                }
-            });
-            return rows;
-        }
-        return plant.branches(list);
-    }
-
-    private static boolean isRule(String key) {
-        return Column.LISTS.get(Column.LIMITS).get(0).kind() instanceof Kind.Word word && word.words().contains(key);
-    }
-
-    private static String id(String list, Branch row) {
-        return switch (list) {
-            case Column.LIMITS -> row.text("rule").orElse("");
-            case Column.SEAL_RATES -> row.text("type").orElse("") + " " + row.text("condition").orElse("");
-            default -> row.text("id").orElse("");
-        };
-    }
-
     /**
      * Makes a draft.
      *
      * @param head    {@code plant}, {@code forms} and {@code rounds} as they are
-     * @param tables  each named after the list that it holds: {@code areas}, {@code materials}, {@code conveyors},
-     *                {@code transfers}, {@code rounds}, {@code limits}, {@code sealRates}
+     * @param tables  each named after the list that it holds: {@code plant}, {@code areas}, {@code materials},
+     *                {@code conveyors}, {@code transfers}, {@code rounds}, {@code limits}, {@code sealRates},
+     *                {@code instruments}
      * @param renamed what columns hold whose heads don't say so, by head: {@code beltWidth}, or {@code beltWidth [mm]}
      */
     public static Draft draft(Branch head, List<Table> tables, Map<String, String> renamed) {
@@ -124,6 +96,10 @@ public final class RegisterImport {
         if (row.isEmpty() && change.row().isPresent()) {
             throw new Refused(Defect.in("", "register-changed-since"));
         }
+        if (change.removal()) {
+            work.remove(list, row.map(grid::identity).orElseThrow());
+            return work.draft();
+        }
         if (!list.equals(Column.ROUNDS)) {
             work.reserve(grid, row);
         }
@@ -144,11 +120,31 @@ public final class RegisterImport {
         }
     }
 
+    private void remove(String list, List<String> identity) {
+        String id = list.equals(Column.ROUNDS) ? identity.get(0) : String.join(" ", identity);
+        String where = list + " " + String.join(" ", identity);
+        Map<String, Branch> rows = lists.get(list);
+        if (list.equals(Column.PLANT)) {
+            defects.add(Defect.in(where, "row-plant-stays"));
+            return;
+        }
+        Branch row = rows.remove(id);
+        if (list.equals(Column.ROUNDS)) {
+            List<Node> left = row.branches("points").stream().filter(point -> !point.text("transfer")
+                    .equals(Optional.of(identity.get(1)))).map(Node.class::cast).toList();
+            if (!left.isEmpty()) {
+                place(rows, id, row.with("points", new Node.Series(left)));
+            }
+        }
+        changed++;
+        proof.used(list, id, where).ifPresent(defects::add);
+    }
+
     /** Takes a rate away before it comes back under another name, at the same place among the others. */
     private void release(int row) {
         Map<String, Branch> rates = lists.get(Column.SEAL_RATES);
         List<Branch> typed = rates.values().stream().filter(rate -> rate.has("type")).toList();
-        released = Optional.of(id(Column.SEAL_RATES, typed.get(row)));
+        released = Optional.of(RegisterLists.id(Column.SEAL_RATES, typed.get(row)));
     }
 
     private Draft draft() {
@@ -156,7 +152,7 @@ public final class RegisterImport {
             defects.addAll(proof.whole(places));
         }
         countRounds();
-        Branch made = made();
+        Branch made = RegisterLists.into(before, lists);
         if (defects.isEmpty()) {
             proveWhole(made);
         }
@@ -259,7 +255,7 @@ public final class RegisterImport {
         for (Taken taken : columns) {
             named = named.with(taken.column().key(), row.cells().get(taken.index()).text());
         }
-        return held.get(list).getOrDefault(id(list, named), Branch.EMPTY);
+        return held.get(list).getOrDefault(RegisterLists.id(list, named), Branch.EMPTY);
     }
 
     private Branch read(Branch row, Branch old, Table.Cell cell, Taken taken, String where) {
@@ -282,9 +278,13 @@ public final class RegisterImport {
     }
 
     private void put(String list, Branch row, Set<String> emptied, String where) {
-        String id = id(list, row);
+        String id = RegisterLists.id(list, row);
         if (list.equals(Column.ROUNDS)) {
             point(id, row, emptied, where);
+            return;
+        }
+        if (list.equals(Column.PLANT) && !lists.get(list).containsKey(id)) {
+            defects.add(Defect.in(where, "row-other-plant", id, String.join(", ", lists.get(list).keySet())));
             return;
         }
         String twice = places.get(list).putIfAbsent(id, where);
@@ -373,29 +373,6 @@ public final class RegisterImport {
                 changed += kept.size();
             }
         }
-    }
-
-    private Branch made() {
-        Branch plant = before.branch("plant").orElse(Branch.EMPTY);
-        for (String list : List.of("areas", "materials", "conveyors", "transfers", Column.SEAL_RATES)) {
-            List<Node> rows = new ArrayList<>(lists.get(list).values());
-            if (!rows.isEmpty() || plant.has(list)) {
-                plant = plant.with(list, new Node.Series(rows));
-            }
-        }
-        Branch limits = plant.branch("limits").orElse(Branch.EMPTY);
-        for (Map.Entry<String, Branch> limit : lists.get(Column.LIMITS).entrySet()) {
-            Branch said = limit.getValue().without("rule");
-            if (!limit.getValue().equals(held.get(Column.LIMITS).get(limit.getKey()))) {
-                limits = said.members().isEmpty() ? limits.without(limit.getKey()) : limits.with(limit.getKey(), said);
-            }
-        }
-        if (!limits.members().isEmpty() || plant.has("limits")) {
-            plant = plant.with("limits", limits);
-        }
-        List<Node> rounds = new ArrayList<>(lists.get(Column.ROUNDS).values());
-        Branch made = before.with("plant", plant);
-        return rounds.isEmpty() && !before.has("rounds") ? made : made.with("rounds", new Node.Series(rounds));
     }
 
     /** The whole must be what a bundle may hold. */

@@ -2,8 +2,10 @@ package bedmark.office.register;
 
 import bedmark.document.Branch;
 import bedmark.document.Defect;
+import bedmark.engine.uncertainty.Instrument;
 import bedmark.engine.verdict.Rule;
 import bedmark.engine.verdict.Sense;
+import bedmark.quantity.Dimension;
 import bedmark.quantity.Quantity;
 import java.math.BigDecimal;
 import java.util.ArrayList;
@@ -16,6 +18,10 @@ import java.util.Optional;
 final class RegisterProof {
     private static final List<String> NAMED = List.of("conveyors", "transfers");
     private static final List<String> NAMES = List.of("tag", "assetId");
+
+    /** Under which key a loading zone names a row of another list. */
+    private static final Map<String, String> REFERENCES = Map.of("areas", "area", "materials", "material",
+            "conveyors", "conveyor");
 
     private final Map<String, Map<String, Branch>> before;
     private final Map<String, Map<String, Branch>> now;
@@ -35,8 +41,39 @@ final class RegisterProof {
             lessThan(row.quantity("skirtSpacing"), belt(now, row), where, "row-boards-over-belt", defects);
         } else if (list.equals(Column.LIMITS)) {
             limits(row, where, defects);
+        } else if (list.equals(Column.PLANT)) {
+            PlantSheet.proof(row, where).ifPresent(defects::add);
+        } else if (list.equals(Column.INSTRUMENTS)) {
+            instrument(row, where).ifPresent(defects::add);
         }
         return defects;
+    }
+
+    /** Whether something of the register still names a row that is to go. */
+    Optional<Defect> used(String list, String id, String where) {
+        String key = REFERENCES.getOrDefault(list, "");
+        Optional<String> user = now.get("transfers").values().stream().filter(row -> row.text(key)
+                .equals(Optional.of(id))).map(row -> row.text("id").orElse("")).findFirst();
+        if (list.equals("transfers")) {
+            user = now.get(Column.ROUNDS).values().stream().filter(round -> round.branches("points").stream()
+                    .anyMatch(point -> point.text("transfer").equals(Optional.of(id))))
+                    .map(row -> row.text("id").orElse("")).findFirst();
+        }
+        return user.map(name -> Defect.in(where, "row-still-used", name));
+    }
+
+    /** Lengths and angles have an uncertainty in their unit, everything else one as a share of the value. */
+    private static Optional<Defect> instrument(Branch row, String where) {
+        Instrument kind = row.text("kind").flatMap(Instrument::ofCode).orElseThrow();
+        if (kind.relative()) {
+            return row.has("relative") && !row.has("standardUncertainty") ? Optional.empty()
+                    : Optional.of(Defect.in(where, "row-uncertainty-share", kind.code()));
+        }
+        Dimension wanted = kind == Instrument.REPOSE || kind == Instrument.SURCHARGE ? Dimension.ANGLE
+                : Dimension.LENGTH;
+        boolean fits = row.quantity("standardUncertainty").filter(one -> one.unit().dimension() == wanted).isPresent();
+        return fits && !row.has("relative") ? Optional.empty() : Optional.of(Defect.in(where,
+                wanted == Dimension.ANGLE ? "row-uncertainty-angle" : "row-uncertainty-length", kind.code()));
     }
 
     /**

@@ -7,7 +7,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 
 /** A register as CSV tables, which an import takes back as they are. */
 public final class RegisterTables {
@@ -31,27 +30,22 @@ public final class RegisterTables {
 
     /** The rows of a list. */
     static List<Branch> rows(Branch head, String list) {
-        Branch plant = head.branch("plant").orElse(Branch.EMPTY);
         List<Branch> rows = new ArrayList<>();
-        if (list.equals(Column.ROUNDS)) {
-            for (Branch round : head.branches("rounds")) {
-                round.branches("points").forEach(point -> rows.add(round.without("points")
+        for (Branch row : RegisterLists.of(head, list).values()) {
+            if (list.equals(Column.ROUNDS)) {
+                row.branches("points").forEach(point -> rows.add(row.without("points")
                         .with("transfer", point.text("transfer").orElse(""))));
+            } else if (!list.equals(Column.LIMITS) && !list.equals(Column.SEAL_RATES) || told(row, list)) {
+                rows.add(row);
             }
-        } else if (list.equals(Column.LIMITS)) {
-            plant.branch("limits").orElse(Branch.EMPTY).members().forEach((rule, limit) -> {
-                if (limit instanceof Branch branch && (branch.has("near") || branch.has("overloaded")
-                        || branch.has("enabled"))) {
-                    rows.add(branch.with("rule", rule));
-                }
-            });
-            rows.removeIf(row -> row.text("rule").equals(Optional.of("certainty")));
-        } else if (list.equals(Column.SEAL_RATES)) {
-            plant.branches(list).stream().filter(row -> row.has("type")).forEach(rows::add);
-        } else {
-            rows.addAll(plant.branches(list));
         }
         return rows;
+    }
+
+    /** Limits and rates that say something which a table shows. */
+    private static boolean told(Branch row, String list) {
+        return list.equals(Column.LIMITS) ? row.has("near") || row.has("overloaded") || row.has("enabled")
+                : row.has("type");
     }
 
     /** A cell as text, a quantity with its unit. */

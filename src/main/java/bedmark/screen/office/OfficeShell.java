@@ -51,6 +51,7 @@ public final class OfficeShell {
     private final Listening listening = new Listening();
     private final ReceiveModel receive;
     private final WorstModel worst;
+    private RegisterModel register;
     private Room room = Room.WORST;
     private Listening shown = new Listening();
 
@@ -88,9 +89,17 @@ public final class OfficeShell {
             case WORST -> new WorstView(desk, worst, begin(), this::zone);
             case RECEIVE -> new ReceiveView(desk, receive, begin());
             case ENERGY -> new EnergyView(desk, new EnergyModel(desk), begin());
-            case REGISTER -> new RegisterView(desk, new RegisterModel(desk), begin());
+            case REGISTER -> new RegisterView(desk, register(), begin());
             case REPORT -> new ReportView(desk, new ReportModel(desk), begin());
         });
+    }
+
+    /** What is typed into the register waits there while other rooms are looked at. */
+    private RegisterModel register() {
+        if (register == null) {
+            register = new RegisterModel(desk);
+        }
+        return register;
     }
 
     /** Opens one zone. */

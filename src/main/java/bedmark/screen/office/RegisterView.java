@@ -12,15 +12,11 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
-import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.scene.Node;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
-import javafx.scene.control.TableColumn;
-import javafx.scene.control.TableView;
 import javafx.scene.control.ToggleButton;
-import javafx.scene.control.cell.TextFieldTableCell;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.Priority;
@@ -47,19 +43,22 @@ final class RegisterView extends VBox {
             written.setText(path.map(one -> wording.text("office.register.saved", one)).orElse(""));
             written.setManaged(path.isPresent());
         });
-        getChildren().addAll(lists, buttons(), written, middle);
+        RegisterTable table = new RegisterTable(model, wording, listening);
+        getChildren().addAll(lists, new RegisterRowTools(model, table, wording, buttons(), listening), written, middle);
         listening.to(model.gridProperty(), grid -> {
             lists.getChildren().setAll(lists());
-            show();
+            table.show(grid);
+            show(table);
         });
-        listening.onChange(model.draftProperty(), draft -> show());
+        listening.onChange(model.plantsProperty(), plants -> lists.getChildren().setAll(lists()));
+        listening.onChange(model.draftProperty(), draft -> show(table));
     }
 
     private List<Node> lists() {
         ArrayList<Node> nodes = new ArrayList<>();
-        if (model.plants().size() > 1) {
+        if (model.plantsProperty().get().size() > 1) {
             ComboBox<String> plants = new ComboBox<>();
-            plants.getItems().setAll(model.plants());
+            plants.getItems().setAll(model.plantsProperty().get());
             plants.setValue(model.plantProperty().get().orElse(null));
             plants.setAccessibleText(wording.text("office.register.plant"));
             plants.valueProperty().addListener((property, before, now) -> model.plantProperty().set(Optional.of(now)));
@@ -75,12 +74,10 @@ final class RegisterView extends VBox {
         return nodes;
     }
 
-    private Node buttons() {
-        FlowPane buttons = new FlowPane(button("import", "office.register.import", model::read),
+    private List<Node> buttons() {
+        return List.of(button("import", "office.register.import", model::read),
                 button("export", "office.register.export", model::write),
                 button("send-round", "office.register.send", model::send));
-        buttons.getStyleClass().add("buttons");
-        return buttons;
     }
 
     private ActionButton button(String id, String key, Consumer<Path> action) {
@@ -90,36 +87,12 @@ final class RegisterView extends VBox {
         return button;
     }
 
-    private void show() {
-        middle.setCenter(model.draftProperty().get().map(this::draft).or(() -> model.gridProperty().get()
-                .map(this::table)).orElse(new Label(wording.text("office.register.none"))));
-    }
-
-    private Node table(RegisterGrid grid) {
-        TableView<List<String>> table = new TableView<>();
-        table.setId("register-table");
-        table.setEditable(true);
-        for (int i = 0; i < grid.keys().size(); i++) {
-            table.getColumns().add(column(grid, i));
+    private void show(RegisterTable table) {
+        Node shown = model.draftProperty().get().map(this::draft).orElseGet(() -> model.gridProperty().get().isPresent()
+                ? table : new Label(wording.text("office.register.none")));
+        if (middle.getCenter() != shown) {
+            middle.setCenter(shown);
         }
-        table.getItems().setAll(grid.rows());
-        table.setPlaceholder(new Label(wording.text("office.register.empty")));
-        return table;
-    }
-
-    private TableColumn<List<String>, String> column(RegisterGrid grid, int index) {
-        String key = grid.keys().get(index);
-        TableColumn<List<String>, String> column = new TableColumn<>(wording.words().has("office.key." + key)
-                ? wording.text("office.key." + key) : key);
-        column.setId("column-" + key);
-        column.setSortable(false);
-        column.setReorderable(false);
-        column.setEditable(index > 0);
-        column.setPrefWidth(index == 0 ? 90 : 140);
-        column.setCellValueFactory(cell -> new ReadOnlyStringWrapper(cell.getValue().get(index)));
-        column.setCellFactory(TextFieldTableCell.forTableColumn());
-        column.setOnEditCommit(event -> model.edit(event.getTablePosition().getRow(), key, event.getNewValue()));
-        return column;
     }
 
     private Node draft(Draft draft) {

@@ -261,44 +261,139 @@ class OfficeWindowTest {
     }
 
     @Test
-    void aCellIsTypedOverAndABadNumberLeavesTheRegisterAsItWas() throws Exception {
+    void aCellThatIsRefusedStaysWithItsReasonUntilItIsMendedOrTakenBack() throws Exception {
         try (OfficeWindow window = window(1280, 800)) {
             receiveAll(window);
             window.click("room-register");
-            edit(window, "865 mm");
+            edit(window, 0, "skirtSpacing", "865 mm", KeyCode.ENTER);
             window.until(() -> spacing(window).equals("865"));
-            edit(window, "wide");
-            window.until(() -> window.words().contains("is no number"));
+            edit(window, 0, "skirtSpacing", "wide", KeyCode.ENTER);
+            String refused = "Loading zones, TP-01, Spacing: \"wide\" is no number";
+            window.until(() -> window.words().contains(refused));
             assertEquals("865", spacing(window));
+            edit(window, 1, "skirtSpacing", "broad", KeyCode.ENTER);
+            window.until(() -> window.words().contains("Loading zones, TP-02, Spacing: \"broad\" is no number"));
+            assertTrue(window.words().contains(refused), "one refusal does not hide another");
+            window.click("room-worst");
+            window.click("language");
+            window.click("room-register");
+            window.until(() -> window.words().contains("TP-01, ") && window.words().contains("wide"));
+            window.click("language");
+            edit(window, 0, "skirtSpacing", "866 mm", KeyCode.ENTER);
+            window.until(() -> spacing(window).equals("866"));
+            assertFalse(window.words().contains("wide"), window.words());
+            window.click("row-revert");
+            assertFalse(window.words().contains("broad"), window.words());
         }
     }
 
-    private static String spacing(OfficeWindow window) {
-        return window.desk().store().registers().get("ostermere").transfer("TP-01").orElseThrow()
-                .quantity("skirtSpacing").orElseThrow().value().toPlainString();
+    @Test
+    void whatIsTypedIsTakenHoweverTheCellIsLeft() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            window.click("room-register");
+            edit(window, 0, "skirtSpacing", "871 mm", KeyCode.TAB);
+            window.until(() -> spacing(window).equals("871"));
+            edit(window, 0, "skirtSpacing", "872 mm", KeyCode.ESCAPE);
+            edit(window, 0, "tag", "TP-01 north", null);
+            window.click("room-report");
+            window.until(() -> zone(window).text("tag").equals(Optional.of("TP-01 north")));
+            assertEquals("871", spacing(window), "Escape takes back");
+            window.click("room-register");
+            edit(window, 0, "skirtSpacing", "873 mm", null);
+            window.click("language");
+            window.until(() -> spacing(window).equals("873"));
+            edit(window, 0, "designBedDepth", "", KeyCode.ENTER);
+            window.until(() -> !zone(window).has("designBedDepth"));
+        }
     }
 
-    private static void edit(OfficeWindow window, String text) throws Exception {
+    @Test
+    void aRowIsAddedAndTakenAwayAndThePlantItselfEdited() throws Exception {
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            window.click("room-register");
+            window.click("list-materials");
+            window.until(() -> window.words().contains("Friction factor"));
+            int held = rows(window);
+            window.click("row-add");
+            edit(window, held, "bulkDensity", "heavy", KeyCode.ENTER);
+            window.click("row-add-take");
+            window.until(() -> window.words().contains("Materials, the new row, Id: the cell is empty"));
+            edit(window, held, "id", "slag", KeyCode.ENTER);
+            window.click("row-add-take");
+            window.until(() -> window.words().contains("Materials, the new row, Bulk density: \"heavy\" is no number"));
+            edit(window, held, "bulkDensity", "1200 kg/m3", KeyCode.ENTER);
+            window.click("row-add-take");
+            window.until(() -> plant(window).branches("materials").size() == held + 1);
+            window.until(() -> rows(window) == held + 1);
+            select(window, held);
+            window.click("row-remove");
+            assertTrue(window.words().contains("Remove slag?"), window.words());
+            window.click("row-remove-yes");
+            window.until(() -> plant(window).branches("materials").size() == held);
+            select(window, 0);
+            window.click("row-remove");
+            window.click("row-remove-yes");
+            window.until(() -> window.words().contains("is still named by TP-"));
+            window.click("list-plant");
+            window.until(() -> window.words().contains("Price of a kWh"));
+            edit(window, 0, "name", "Ostermere North", KeyCode.ENTER);
+            window.until(() -> plant(window).text("name").equals(Optional.of("Ostermere North")));
+        }
+    }
+
+    private static int rows(OfficeWindow window) throws Exception {
+        return ((TableView<?>) window.node("register-table")).getItems().size();
+    }
+
+    private static void select(OfficeWindow window, int row) throws Exception {
+        TableView<?> table = (TableView<?>) window.node("register-table");
+        Glass.on(() -> {
+            table.getSelectionModel().clearAndSelect(row);
+            return null;
+        });
+        window.settle();
+    }
+
+    private static Branch plant(OfficeWindow window) {
+        return window.desk().store().registers().get("ostermere").document();
+    }
+
+    private static Branch zone(OfficeWindow window) {
+        return plant(window).branches("transfers").get(0);
+    }
+
+    private static String spacing(OfficeWindow window) {
+        return zone(window).quantity("skirtSpacing").orElseThrow().value().toPlainString();
+    }
+
+    /** @param end the key that leaves the cell; nothing where something else does */
+    private static void edit(OfficeWindow window, int row, String key, String text, KeyCode end) throws Exception {
         TableView<?> table = (TableView<?>) window.node("register-table");
         Glass.on(() -> {
             TableColumn<?, ?> column = table.getColumns().stream().filter(one -> one.getId()
-                    .equals("column-skirtSpacing")).findFirst().orElseThrow();
+                    .equals("column-" + key)).findFirst().orElseThrow();
             table.scrollToColumnIndex(table.getColumns().indexOf(column));
+            table.scrollTo(row);
             table.layout();
-            startEdit(table, column);
+            startEdit(table, row, column);
             return null;
         });
         window.settle();
         window.robot().push(KeyCode.SHORTCUT, KeyCode.A);
+        window.robot().push(KeyCode.DELETE);
         window.type(text);
-        window.robot().push(KeyCode.ENTER);
+        if (end != null) {
+            window.robot().push(end);
+        }
         window.settle();
     }
 
     @SuppressWarnings("unchecked")
-    private static <T> void startEdit(TableView<T> table, TableColumn<?, ?> column) {
+    private static <T> void startEdit(TableView<T> table, int row, TableColumn<?, ?> column) {
         table.requestFocus();
-        table.edit(0, (TableColumn<T, ?>) column);
+        table.edit(row, (TableColumn<T, ?>) column);
     }
 
     @Test

@@ -1,0 +1,79 @@
+package bedmark.screen.office;
+
+import bedmark.office.register.RegisterGrid;
+import bedmark.screen.Listening;
+import bedmark.screen.office.RegisterLine.Shown;
+import bedmark.wording.Wording;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.IntStream;
+import javafx.collections.ListChangeListener;
+import javafx.scene.control.Label;
+import javafx.scene.control.TableColumn;
+import javafx.scene.control.TableView;
+
+/** One list of the register as a table whose cells are typed into where they stand. */
+final class RegisterTable extends TableView<RegisterLine> {
+    /** Width of a character and around a text, and how wide a column becomes by itself, in pixels. */
+    private static final double CHARACTER = 9.5;
+    private static final double AROUND = 30;
+    private static final double NARROWEST = 80;
+    private static final double WIDEST = 330;
+
+    private final RegisterModel model;
+    private final Wording wording;
+    private List<String> keys = List.of();
+    private String list = "";
+
+    RegisterTable(RegisterModel model, Wording wording, Listening listening) {
+        this.model = model;
+        this.wording = wording;
+        setId("register-table");
+        setEditable(true);
+        getSelectionModel().setCellSelectionEnabled(true);
+        setPlaceholder(new Label(wording.text("office.register.empty")));
+        setItems(model.lines());
+        ListChangeListener<RegisterLine> more = change -> showFresh();
+        model.lines().addListener(more);
+        listening.onEnd(() -> {
+            // Whoever types while the screen goes has typed it.
+            edit(-1, null);
+            model.lines().removeListener(more);
+        });
+    }
+
+    /** Shows the columns of a list; the same ones stay. */
+    void show(Optional<RegisterGrid> grid) {
+        grid.filter(one -> !one.list().equals(list)).ifPresent(one -> {
+            list = one.list();
+            keys = one.keys();
+            getColumns().setAll(IntStream.range(0, keys.size()).mapToObj(i -> column(one, i)).toList());
+        });
+    }
+
+    private TableColumn<RegisterLine, Shown> column(RegisterGrid grid, int index) {
+        String key = grid.keys().get(index);
+        String head = RegisterWords.column(wording, key);
+        TableColumn<RegisterLine, Shown> column = new TableColumn<>(head);
+        column.setId("column-" + key);
+        column.setSortable(false);
+        column.setReorderable(false);
+        int longest = grid.rows().stream().mapToInt(row -> row.get(index).length()).max().orElse(0);
+        column.setPrefWidth(Math.min(WIDEST, Math.max(NARROWEST, AROUND + CHARACTER * Math.max(longest,
+                head.length()))));
+        column.setCellValueFactory(cell -> cell.getValue().cell(index));
+        column.setCellFactory(made -> new RegisterCell(model, key, index > 0));
+        return column;
+    }
+
+    private void showFresh() {
+        if (model.freshProperty().get()) {
+            scrollTo(model.lines().size() - 1);
+        }
+    }
+
+    /** The row that was chosen, unless it is a new one. */
+    Optional<List<String>> chosen() {
+        return Optional.ofNullable(getSelectionModel().getSelectedItem()).flatMap(RegisterLine::identity);
+    }
+}

@@ -42,8 +42,14 @@ final class RegisterRowTools extends VBox {
         getChildren().addAll(buttons, refused);
         listening.onChange(model.freshProperty(), fresh -> show());
         listening.onChange(model.draftProperty(), draft -> show());
-        listening.onChange(model.gridProperty(), grid -> leave(Optional.empty()));
-        listening.onChange(table.getSelectionModel().selectedItemProperty(), line -> leave(Optional.empty()));
+        listening.onChange(model.gridProperty(), grid -> {
+            leave(Optional.empty());
+            show();
+        });
+        listening.onChange(table.getSelectionModel().selectedItemProperty(), line -> {
+            leave(Optional.empty());
+            show();
+        });
         listening.onChange(model.staysProperty(), stays -> tell());
         listening.to(model.refusedProperty(), waiting -> tell());
         show();
@@ -79,10 +85,16 @@ final class RegisterRowTools extends VBox {
                     }), button(Weight.PLAIN, "remove-no", () -> leave(Optional.empty())));
         } else if (model.freshProperty().get()) {
             return List.of(button(Weight.PRIMARY, "add-take", model::takeRow),
-                    button(Weight.PLAIN, "leave", model::leaveRow));
+                    button(Weight.PLAIN, "leave", () -> {
+                        model.leaveRow();
+                        table.requestFocus();
+                    }));
         }
         boolean plant = model.listProperty().get().equals("plant");
-        ActionButton add = button(Weight.PLAIN, "add", model::begin);
+        ActionButton add = button(Weight.PLAIN, "add", () -> {
+            model.begin();
+            table.begin();
+        });
         add.setDisable(plant);
         ActionButton remove = button(Weight.PLAIN, "remove", () -> leave(table.chosen()));
         remove.setDisable(plant || table.chosen().isEmpty());
@@ -90,8 +102,12 @@ final class RegisterRowTools extends VBox {
     }
 
     private void leave(Optional<List<String>> row) {
-        leaving = row;
-        show();
+        if (!leaving.equals(row)) {
+            leaving = row;
+            show();
+            // The button that was pressed is gone; the keys stay with the question, on the answer that does nothing.
+            (row.isPresent() ? buttons.getChildren().get(buttons.getChildren().size() - 1) : table).requestFocus();
+        }
     }
 
     private ActionButton button(Weight weight, String key, Runnable action) {

@@ -7,7 +7,6 @@ import bedmark.wording.Wording;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
-import javafx.collections.ListChangeListener;
 import javafx.scene.control.Label;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
@@ -33,13 +32,8 @@ final class RegisterTable extends TableView<RegisterLine> {
         getSelectionModel().setCellSelectionEnabled(true);
         setPlaceholder(new Label(wording.text("office.register.empty")));
         setItems(model.lines());
-        ListChangeListener<RegisterLine> more = change -> showFresh();
-        model.lines().addListener(more);
-        listening.onEnd(() -> {
-            // Whoever types while the screen goes has typed it.
-            edit(-1, null);
-            model.lines().removeListener(more);
-        });
+        // Whoever types while the screen goes has typed it.
+        listening.onEnd(() -> edit(-1, null));
     }
 
     /** Shows the columns of a list; the same ones stay. */
@@ -66,10 +60,15 @@ final class RegisterTable extends TableView<RegisterLine> {
         return column;
     }
 
-    private void showFresh() {
-        if (model.freshProperty().get()) {
-            scrollTo(model.lines().size() - 1);
-        }
+    /** Types into the new row. */
+    void begin() {
+        int row = model.lines().size() - 1;
+        scrollTo(row);
+        scrollToColumnIndex(0);
+        layout();
+        requestFocus();
+        getSelectionModel().clearAndSelect(row, getColumns().get(0));
+        edit(row, getColumns().get(0));
     }
 
     /** The row that was chosen, unless it is a new one. */

@@ -8,7 +8,6 @@ import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
@@ -19,6 +18,7 @@ import javafx.scene.control.ScrollPane;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
@@ -34,8 +34,11 @@ final class RegisterView extends VBox {
         this.model = model;
         this.wording = desk.wording();
         getStyleClass().add("room");
+        HBox plants = new HBox();
         FlowPane lists = new FlowPane();
         lists.getStyleClass().add("filters");
+        listening.to(model.plantsProperty(), known -> plants.setManaged(known.size() > 1));
+        plants.getStyleClass().add("filters");
         VBox.setVgrow(middle, Priority.ALWAYS);
         Label written = Texts.wrapped("");
         written.getStyleClass().add("soft");
@@ -44,34 +47,35 @@ final class RegisterView extends VBox {
             written.setManaged(path.isPresent());
         });
         RegisterTable table = new RegisterTable(model, wording, listening);
-        getChildren().addAll(lists, new RegisterRowTools(model, table, wording, buttons(), listening), written, middle);
+        getChildren().addAll(plants, lists, new RegisterRowTools(model, table, wording, buttons(), listening), written, middle);
         listening.to(model.gridProperty(), grid -> {
-            lists.getChildren().setAll(lists());
             table.show(grid);
             show(table);
         });
-        listening.onChange(model.plantsProperty(), plants -> lists.getChildren().setAll(lists()));
         listening.onChange(model.draftProperty(), draft -> show(table));
+        listening.to(model.plantsProperty(), known -> plants.getChildren().setAll(plants(known)));
+        for (String list : RegisterGrid.lists()) {
+            ToggleButton button = new ToggleButton(RegisterWords.list(wording, list));
+            button.setId("list-" + list);
+            listening.to(model.listProperty(), shown -> button.setSelected(shown.equals(list)));
+            button.setOnAction(event -> {
+                button.setSelected(true);
+                model.listProperty().set(list);
+            });
+            lists.getChildren().add(button);
+        }
     }
 
-    private List<Node> lists() {
-        ArrayList<Node> nodes = new ArrayList<>();
-        if (model.plantsProperty().get().size() > 1) {
-            ComboBox<String> plants = new ComboBox<>();
-            plants.getItems().setAll(model.plantsProperty().get());
-            plants.setValue(model.plantProperty().get().orElse(null));
-            plants.setAccessibleText(wording.text("office.register.plant"));
-            plants.valueProperty().addListener((property, before, now) -> model.plantProperty().set(Optional.of(now)));
-            nodes.add(plants);
+    private List<Node> plants(List<String> known) {
+        if (known.size() < 2) {
+            return List.of();
         }
-        for (String list : RegisterGrid.lists()) {
-            ToggleButton button = new ToggleButton(wording.text("office.list." + list));
-            button.setId("list-" + list);
-            button.setSelected(list.equals(model.listProperty().get()));
-            button.setOnAction(event -> model.listProperty().set(list));
-            nodes.add(button);
-        }
-        return nodes;
+        ComboBox<String> plants = new ComboBox<>();
+        plants.getItems().setAll(known);
+        plants.setValue(model.plantProperty().get().orElse(null));
+        plants.setAccessibleText(wording.text("office.register.plant"));
+        plants.valueProperty().addListener((property, before, now) -> model.plantProperty().set(Optional.of(now)));
+        return List.of(plants);
     }
 
     private List<Node> buttons() {

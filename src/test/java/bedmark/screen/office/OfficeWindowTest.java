@@ -317,7 +317,10 @@ class OfficeWindowTest {
             window.until(() -> window.words().contains("Friction factor"));
             int held = rows(window);
             window.click("row-add");
+            window.type("dross");
             edit(window, held, "bulkDensity", "heavy", KeyCode.ENTER);
+            window.until(() -> window.words().contains("dross"));
+            edit(window, held, "id", "", KeyCode.ENTER);
             window.click("row-add-take");
             window.until(() -> window.words().contains("Materials, the new row, Id: the cell is empty"));
             edit(window, held, "id", "slag", KeyCode.ENTER);

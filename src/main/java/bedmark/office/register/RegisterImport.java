@@ -29,7 +29,7 @@ import java.util.regex.Pattern;
 public final class RegisterImport {
     private static final Pattern HEAD = Pattern.compile("(.*?)\\s*[\\[(]\\s*(.+?)\\s*[\\])]?\\s*");
 
-    private final Map<String, String> renamed;
+    private final Meanings meanings;
     private final boolean emptying;
     private final Map<String, Map<String, Branch>> held = new LinkedHashMap<>();
     private final Map<String, Map<String, Branch>> lists = new LinkedHashMap<>();
@@ -49,9 +49,9 @@ public final class RegisterImport {
     }
 
     /** @param emptying whether an empty cell empties what it stands for */
-    private RegisterImport(Branch before, Map<String, String> renamed, boolean emptying) {
+    private RegisterImport(Branch before, Meanings meanings, boolean emptying) {
         this.before = before;
-        this.renamed = renamed;
+        this.meanings = meanings;
         this.emptying = emptying;
         for (String list : Column.LISTS.keySet()) {
             Map<String, Branch> rows = RegisterLists.of(before, list);
@@ -71,14 +71,23 @@ public final class RegisterImport {
      * @param renamed what columns hold whose heads don't say so, by head: {@code beltWidth}, or {@code beltWidth [mm]}
      */
     public static Draft draft(Branch head, List<Table> tables, Map<String, String> renamed) {
-        RegisterImport work = new RegisterImport(head, renamed, false);
+        return draft(head, tables, new Meanings(renamed, Map.of(), Map.of()));
+    }
+
+    /**
+     * Makes a draft.
+     *
+     * @param head     {@code plant}, {@code forms} and {@code rounds} as they are
+     * @param meanings what tables and columns hold whose names don't say so
+     */
+    public static Draft draft(Branch head, List<Table> tables, Meanings meanings) {
+        RegisterImport work = new RegisterImport(head, meanings, false);
         // What is referred to comes first, in whatever order the tables came.
         for (String list : Column.LISTS.keySet()) {
-            tables.stream().filter(table -> list(table.name()).equals(Optional.of(list)))
-                    .forEach(table -> work.take(table, list));
+            tables.stream().filter(table -> work.list(table).equals(list)).forEach(table -> work.take(table, list));
         }
-        tables.stream().filter(table -> list(table.name()).isEmpty()).forEach(table -> work.defects.add(
-                Defect.in(table.source(), "table-unknown", table.name(),
+        tables.stream().filter(table -> !meanings.lists().containsKey(table.source()) && work.list(table).isEmpty())
+                .forEach(table -> work.defects.add(Defect.in(table.source(), "table-unknown", table.name(),
                         String.join(", ", Column.LISTS.keySet()))));
         return work.draft();
     }
@@ -91,7 +100,7 @@ public final class RegisterImport {
     public static Draft changed(Branch head, RegisterChange change) {
         String list = change.list();
         RegisterGrid grid = RegisterGrid.of(head, list);
-        RegisterImport work = new RegisterImport(head, Map.of(), true);
+        RegisterImport work = new RegisterImport(head, Meanings.AS_NAMED, true);
         Optional<Integer> row = change.row().flatMap(grid::row);
         if (row.isEmpty() && change.row().isPresent()) {
             throw new Refused(Defect.in("", "register-changed-since"));
@@ -159,9 +168,11 @@ public final class RegisterImport {
         return new Draft(before, made, mapping, defects, added, changed, same);
     }
 
-    private static Optional<String> list(String name) {
-        String plain = plain(name);
-        return Column.LISTS.keySet().stream().filter(list -> plain(list).equals(plain)).findFirst();
+    /** The list that a table holds; empty where it holds none. */
+    private String list(Table table) {
+        String plain = plain(table.name());
+        return Optional.ofNullable(meanings.lists().get(table.source())).orElseGet(() ->
+                Column.LISTS.keySet().stream().filter(list -> plain(list).equals(plain)).findFirst().orElse(""));
     }
 
     private static String plain(String text) {
@@ -199,7 +210,7 @@ public final class RegisterImport {
         List<Table.Cell> heads = table.rows().get(0).cells();
         for (int i = 0; i < heads.size(); i++) {
             String head = heads.get(i).text();
-            String meant = renamed.getOrDefault(head, head);
+            String meant = meanings.of(table.source(), head);
             Matcher matcher = HEAD.matcher(meant);
             boolean united = matcher.matches();
             String name = united ? matcher.group(1) : meant;

@@ -6,6 +6,7 @@ import bedmark.document.Refused;
 import bedmark.journal.NotSaved;
 import bedmark.office.RoundDesk;
 import bedmark.office.register.Draft;
+import bedmark.office.register.Meanings;
 import bedmark.office.register.RegisterChange;
 import bedmark.office.register.RegisterDesk;
 import bedmark.office.register.RegisterGrid;
@@ -14,6 +15,7 @@ import bedmark.office.register.RegisterTables;
 import bedmark.office.register.Table;
 import bedmark.office.register.Tables;
 import bedmark.pack.RoundFile;
+import bedmark.quantity.Unit;
 import bedmark.screen.office.RegisterLine.Shown;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -52,6 +54,8 @@ public final class RegisterModel {
     private final ReadOnlyObjectWrapper<Optional<Draft>> draft = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyObjectWrapper<Optional<Path>> written = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ObservableList<RegisterLine> lines = FXCollections.observableArrayList();
+    private List<Table> tables = List.of();
+    private Meanings meanings = Meanings.AS_NAMED;
     private final RegisterEdits edits = new RegisterEdits();
     /** The lists in which a new row is being typed. */
     private final Set<List<String>> begun = new HashSet<>();
@@ -274,12 +278,36 @@ public final class RegisterModel {
 
     /** Reads the tables of a folder; nothing is taken in yet. */
     public void read(Path folder) {
-        Optional<String> id = plant.get();
         desk.ask(progress -> {
-            List<Table> tables = new ArrayList<>();
-            files(folder).forEach(file -> tables.addAll(Tables.read(file)));
-            return RegisterImport.draft(head(id), tables, Map.of());
-        }, made -> draft.set(Optional.of(made)));
+            List<Table> read = new ArrayList<>();
+            files(folder).forEach(file -> read.addAll(Tables.read(file)));
+            return read;
+        }, read -> {
+            tables = List.copyOf(read);
+            draw(Meanings.AS_NAMED);
+        });
+    }
+
+    private void draw(Meanings meant) {
+        Optional<String> id = plant.get();
+        meanings = meant;
+        List<Table> drawn = tables;
+        desk.ask(progress -> RegisterImport.draft(head(id), drawn, meant), made -> draft.set(Optional.of(made)));
+    }
+
+    /** The tables that were read, by where they come from. */
+    public List<String> sources() {
+        return tables.stream().map(Table::source).toList();
+    }
+
+    /** A table holds that list; none where it is empty. */
+    public void holds(String source, String holding) {
+        draw(meanings.holding(source, holding));
+    }
+
+    /** A column is that, in that unit; it is not taken in where the key is empty. */
+    public void means(String source, String head, String key, Optional<Unit> unit) {
+        draw(meanings.with(new Meanings.Head(source, head), key, unit));
     }
 
     private static List<Path> files(Path folder) {

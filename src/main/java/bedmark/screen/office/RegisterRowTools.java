@@ -27,6 +27,7 @@ final class RegisterRowTools extends VBox {
     private final Wording wording;
     private final List<Node> others;
     private final FlowPane buttons = new FlowPane();
+    private final HBox asked = new HBox();
     private final VBox refused = new VBox();
     private Optional<List<String>> leaving = Optional.empty();
 
@@ -39,9 +40,15 @@ final class RegisterRowTools extends VBox {
         this.others = others;
         getStyleClass().add("row-tools");
         buttons.getStyleClass().add("buttons");
-        getChildren().addAll(buttons, refused);
+        asked.getStyleClass().add("asked");
+        asked.managedProperty().bind(asked.visibleProperty());
+        refused.managedProperty().bind(refused.visibleProperty());
+        getChildren().addAll(buttons, asked, refused);
         listening.onChange(model.freshProperty(), fresh -> show());
-        listening.onChange(model.draftProperty(), draft -> show());
+        listening.onChange(model.draftProperty(), draft -> {
+            leaving = Optional.empty();
+            show();
+        });
         listening.onChange(model.gridProperty(), grid -> {
             leave(Optional.empty());
             show();
@@ -61,6 +68,18 @@ final class RegisterRowTools extends VBox {
             shown.addAll(rowTools());
         }
         buttons.getChildren().setAll(shown);
+        asked.getChildren().setAll(leaving.map(this::question).orElse(List.of()));
+        asked.setVisible(leaving.isPresent());
+    }
+
+    private List<Node> question(List<String> row) {
+        Label sure = Texts.wrapped(wording.text("office.register.remove-sure", String.join(" ", row)));
+        sure.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(sure, Priority.ALWAYS);
+        return List.of(sure, button(Weight.PRIMARY, "remove-yes", () -> {
+            leave(Optional.empty());
+            model.remove(row);
+        }), button(Weight.PLAIN, "remove-no", () -> leave(Optional.empty())));
     }
 
     private void tell() {
@@ -72,18 +91,11 @@ final class RegisterRowTools extends VBox {
             told.add(line);
         });
         refused.getChildren().setAll(told);
-        refused.setManaged(!told.isEmpty());
+        refused.setVisible(!told.isEmpty());
     }
 
     private List<Node> rowTools() {
-        if (leaving.isPresent()) {
-            List<String> row = leaving.get();
-            return List.of(new Label(wording.text("office.register.remove-sure", String.join(" ", row))),
-                    button(Weight.PRIMARY, "remove-yes", () -> {
-                        leave(Optional.empty());
-                        model.remove(row);
-                    }), button(Weight.PLAIN, "remove-no", () -> leave(Optional.empty())));
-        } else if (model.freshProperty().get()) {
+        if (model.freshProperty().get()) {
             return List.of(button(Weight.PRIMARY, "add-take", model::takeRow),
                     button(Weight.PLAIN, "leave", () -> {
                         model.leaveRow();
@@ -106,7 +118,7 @@ final class RegisterRowTools extends VBox {
             leaving = row;
             show();
             // The button that was pressed is gone; the keys stay with the question, on the answer that does nothing.
-            (row.isPresent() ? buttons.getChildren().get(buttons.getChildren().size() - 1) : table).requestFocus();
+            (row.isPresent() ? asked.getChildren().get(2) : table).requestFocus();
         }
     }
 

@@ -12,6 +12,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
 import javafx.scene.Node;
+import javafx.scene.Scene;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
@@ -28,6 +29,7 @@ final class RegisterView extends VBox {
     private final RegisterModel model;
     private final Wording wording;
     private final BorderPane middle = new BorderPane();
+    private final ScrollPane drafted = new ScrollPane();
 
     RegisterView(OfficeDesk desk, RegisterModel model, Listening listening) {
         this.desk = desk;
@@ -37,7 +39,7 @@ final class RegisterView extends VBox {
         HBox plants = new HBox();
         FlowPane lists = new FlowPane();
         lists.getStyleClass().add("filters");
-        listening.to(model.plantsProperty(), known -> plants.setManaged(known.size() > 1));
+        plants.managedProperty().bind(plants.visibleProperty());
         plants.getStyleClass().add("filters");
         VBox.setVgrow(middle, Priority.ALWAYS);
         Label written = Texts.wrapped("");
@@ -47,13 +49,17 @@ final class RegisterView extends VBox {
             written.setManaged(path.isPresent());
         });
         RegisterTable table = new RegisterTable(model, wording, listening);
-        getChildren().addAll(plants, lists, new RegisterRowTools(model, table, wording, buttons(), listening), written, middle);
+        getChildren().addAll(plants, lists, new RegisterRowTools(model, table, wording, buttons(), listening), written,
+                middle);
         listening.to(model.gridProperty(), grid -> {
             table.show(grid);
             show(table);
         });
         listening.onChange(model.draftProperty(), draft -> show(table));
-        listening.to(model.plantsProperty(), known -> plants.getChildren().setAll(plants(known)));
+        listening.to(model.plantsProperty(), known -> {
+            plants.setVisible(known.size() > 1);
+            plants.getChildren().setAll(plants(known));
+        });
         for (String list : RegisterGrid.lists()) {
             ToggleButton button = new ToggleButton(RegisterWords.list(wording, list));
             button.setId("list-" + list);
@@ -117,15 +123,17 @@ final class RegisterView extends VBox {
         decide.getChildren().add(leave);
         box.getChildren().add(decide);
         draft.defects().forEach(defect -> box.getChildren().add(Texts.trouble(wording.sentence(defect))));
-        draft.mapping().forEach(column -> {
-            Label line = Texts.wrapped(wording.text(column.key().isEmpty() ? "office.import.unused"
-                    : "office.import.column", column.source(), column.head(), column.list(), column.key(),
-                    column.unit()));
-            line.getStyleClass().add("soft");
-            box.getChildren().add(line);
-        });
-        ScrollPane scroll = new ScrollPane(box);
-        scroll.setFitToWidth(true);
-        return scroll;
+        box.getChildren().add(new RegisterMapping(model, draft, wording));
+        showDraft(box);
+        return drafted;
+    }
+
+    /** What is chosen anew stays where it is, with the keys on it. */
+    private void showDraft(Node box) {
+        Optional<String> held = Optional.ofNullable(getScene()).map(Scene::getFocusOwner).map(Node::getId);
+        drafted.setFitToWidth(true);
+        drafted.setContent(box);
+        box.applyCss();
+        held.map(id -> box.lookup("#" + id)).ifPresent(Node::requestFocus);
     }
 }

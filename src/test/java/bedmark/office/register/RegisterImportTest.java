@@ -10,6 +10,7 @@ import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.office.OfficeStore;
 import bedmark.office.Offices;
+import bedmark.quantity.Unit;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.math.BigDecimal;
@@ -241,6 +242,25 @@ class RegisterImportTest {
         assertEquals(List.of("id", "conveyor", "skirtSpacing", ""), draft.mapping().stream()
                 .map(Draft.Mapped::key).toList());
         assertEquals("cm", draft.mapping().get(2).unit());
+    }
+
+    @Test
+    void aTableAndItsColumnsAreWhatAPersonSaysTheyAre() throws IOException {
+        List<Table> tables = List.of(table("points", "Nr,Belt,Gap", "TP-90,C1,30"), table("areas", "Nr,name", "east,East"),
+                table("notes", "whatever", "else"));
+        Meanings meanings = Meanings.AS_NAMED.holding("points.csv", "transfers").holding("notes.csv", "")
+                .with(new Meanings.Head("points.csv", "Nr"), "id", Optional.empty())
+                .with(new Meanings.Head("points.csv", "Belt"), "conveyor", Optional.empty())
+                .with(new Meanings.Head("points.csv", "Gap"), "skirtSpacing", Unit.ofCode("[in_i]"))
+                .with(new Meanings.Head("areas.csv", "Nr"), "id", Optional.empty())
+                .with(new Meanings.Head("areas.csv", "name"), "", Optional.empty());
+        Draft draft = RegisterImport.draft(HEAD, tables, meanings);
+        assertEquals(List.of(), draft.defects());
+        Branch plant = draft.head().branch("plant").orElseThrow();
+        List<Branch> zones = plant.branches("transfers");
+        assertEquals("[in_i]", zones.get(zones.size() - 1).quantity("skirtSpacing").orElseThrow().unit().code());
+        List<Branch> areas = plant.branches("areas");
+        assertEquals(Branch.EMPTY.with("id", "east"), areas.get(areas.size() - 1), "its name is not taken in");
     }
 
     private static Draft takenBack(Branch head) throws IOException {

@@ -18,6 +18,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.scene.Node;
+import javafx.scene.control.ComboBox;
 import javafx.scene.control.ListView;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
@@ -258,6 +259,36 @@ class OfficeWindowTest {
                 assertEquals(1, files.filter(file -> file.toString().endsWith(".round.json")).count());
             }
         }
+    }
+
+    @Test
+    void aTableWithHeadsOfItsOwnIsTakenOnceItsColumnsAreChosen() throws Exception {
+        Path out = Files.createDirectories(folder.resolve("out"));
+        Files.writeString(out.resolve("points.csv"), "Point,Belt,Gap,Colour\nTP-01,C1,871,red\n");
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            window.click("room-register");
+            window.chooses(out);
+            window.click("import");
+            window.until(() -> window.words().contains("none of a register's lists"));
+            choose(window, "table-points-csv", "Loading zones");
+            choose(window, "column-points-csv-Point", "Id");
+            choose(window, "column-points-csv-Belt", "Conveyor");
+            choose(window, "column-points-csv-Gap", "Spacing");
+            window.until(() -> window.words().contains("871 has no unit"));
+            choose(window, "unit-points-csv-Gap", "mm");
+            window.click("take-draft");
+            window.until(() -> spacing(window).equals("871"));
+        }
+    }
+
+    private static void choose(OfficeWindow window, String id, String text) throws Exception {
+        ComboBox<?> box = (ComboBox<?>) window.node(id);
+        Glass.on(() -> {
+            box.getSelectionModel().select(box.getItems().stream().map(Object::toString).toList().indexOf(text));
+            return null;
+        });
+        window.settle();
     }
 
     @Test

@@ -7,6 +7,7 @@ import bedmark.command.Terminal.Result;
 import bedmark.document.Branch;
 import bedmark.json.JsonReader;
 import bedmark.office.Offices;
+import bedmark.survey.Bundle;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -262,5 +263,31 @@ class OfficeCommandsTest {
         assertEquals(0, office("action", "TP-08", "--text", "Renew", "--plant", "westerly").code());
         assertTrue(office("action").out().contains(",westerly,TP-08,"));
         assertEquals(2, office("action", "--plant", "westerly").code());
+    }
+
+    @Test
+    void conflictsAreListedWithTheDigestByWhichEachSideIsChosen() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        Branch original = bundle.document().branches("surveys").get(0);
+        Offices.pack(Offices.with(bundle, "two", "2026-03-18T14:00:00+01:00",
+                List.of(original.with("notes", "told otherwise"))), folder.resolve("tablet"), packs.resolve("c.zip"));
+        assertEquals("No conflict waits.", office("settle").out().strip());
+        assertEquals(1, received().code());
+        Result text = office("settle");
+        assertEquals(0, text.code(), text::err);
+        Branch conflict = JsonReader.read(office("settle", "--json").out().getBytes(StandardCharsets.UTF_8)).root();
+        assertEquals("same-revision", conflict.text("kind").orElseThrow());
+        assertEquals(original.text("transfer"), conflict.text("transfer"));
+        assertEquals(2, conflict.branches("sides").size());
+        conflict.branches("sides").forEach(side -> assertTrue(text.out().lines().anyMatch(line ->
+                line.contains(side.text("digest").orElseThrow())
+                        && line.contains(original.text("inspector").orElseThrow())), text::out));
+        assertEquals(4, text.out().lines().count(), text::out);
+        String zone = conflict.text("transfer").orElseThrow();
+        String side = conflict.branches("sides").get(1).text("digest").orElseThrow();
+        assertEquals(2, office("settle", zone, side).code());
+        assertEquals(2, office("settle", "--reason", "r").code());
+        assertEquals(0, office("settle", zone, side, "--reason", "r", "--person", "Ida Marsh").code());
+        assertEquals("", office("settle", "--json").out());
     }
 }

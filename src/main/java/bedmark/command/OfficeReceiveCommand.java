@@ -104,7 +104,8 @@ final class OfficeReceiveCommand implements Callable<Integer> {
     private void confirm(OfficeStore store, Path pack, Receipt receipt) {
         Path into = receipts == null ? pack.toAbsolutePath().getParent() : receipts;
         try {
-            say("  ", "office.receive.receipt", store.write(receipt, into));
+            say("  ", "office.receive.receipt-of", store.write(receipt, into),
+                    OfficeNameCommand.named(surroundings, receipt.office().name()));
         } catch (Refused e) {
             surroundings.err().println("bedmark: " + surroundings.wording().sentence(e.defect()));
         }

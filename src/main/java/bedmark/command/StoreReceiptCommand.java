@@ -9,6 +9,7 @@ import bedmark.pack.Fingerprint;
 import bedmark.pack.ReceiptReader;
 import bedmark.pack.SignedReceipt;
 import bedmark.survey.LevelWord;
+import bedmark.wording.Wording;
 import java.nio.file.Path;
 import java.util.HashSet;
 import java.util.List;
@@ -63,8 +64,8 @@ final class StoreReceiptCommand implements Callable<Integer> {
                     book.requireTrusted(signed, vouched);
                     return book.note(signed, "");
                 });
-                surroundings.out().println(surroundings.words().text("queue.receipt",
-                        outcome.receipt().office().name(), outcome.received().size(), outcome.known().size()));
+                surroundings.out().println(surroundings.words().text("queue.receipt", Wording.plain(
+                        OfficeNameCommand.named(surroundings, outcome.receipt().office().name())), outcome.received().size(), outcome.known().size()));
                 if (!outcome.differing().isEmpty()) {
                     surroundings.err().println("bedmark: " + surroundings.words().text("queue.receipt-differs",
                             outcome.differing().size()));

@@ -290,4 +290,19 @@ class OfficeCommandsTest {
         assertEquals(0, office("settle", zone, side, "--reason", "r", "--person", "Ida Marsh").code());
         assertEquals("", office("settle", "--json").out());
     }
+
+    @Test
+    void anOfficeIsNamedAndItsReceiptsCarryTheName() throws IOException {
+        assertEquals(0, received().code());
+        assertEquals("without a name", office("name").out().strip());
+        assertEquals(2, office("name", " ").code());
+        assertEquals("Ostermere works office", office("name", "Ostermere works office").out().strip());
+        assertTrue(office("receive", packs.toString()).out().contains("Ostermere works office"));
+        try (var files = Files.list(packs)) {
+            for (Path file : files.filter(one -> one.toString().endsWith(".receipt.json")).toList()) {
+                assertTrue(Files.readString(file).contains("Ostermere works office"), file.toString());
+            }
+        }
+        assertEquals("Ostermere works office", office("name").out().strip());
+    }
 }

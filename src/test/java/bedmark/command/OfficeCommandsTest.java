@@ -175,6 +175,7 @@ class OfficeCommandsTest {
         String office = folder.resolve("office").toString();
         Result sound = Terminal.run("office", "check", office);
         assertEquals(0, sound.code(), sound::err);
+        assertTrue(sound.out().startsWith("2 packs, "), sound::out);
         assertEquals(0, Terminal.run("office", "rebuild", office).code());
         try (var files = Files.list(folder.resolve("office/packs"))) {
             Files.delete(files.findFirst().orElseThrow());
@@ -304,5 +305,26 @@ class OfficeCommandsTest {
             }
         }
         assertEquals("Ostermere works office", office("name").out().strip());
+    }
+
+    @Test
+    void energyThatNothingTellsIsUnknownAndPlantsAreToldApart() {
+        received();
+        assertTrue(!office("energy").out().contains("Ostermere"), "one plant needs no name");
+        office("energy", "--by-area").out().lines().forEach(line ->
+                assertTrue(line.split("Biomass yard", -1).length <= 2, line));
+        String tables = folder.resolve("tables").toString();
+        assertEquals(0, office("export-register", "--out", tables).code());
+        assertEquals(0, office("import-register", tables, "--plant", "westerly").code());
+        String csv = office("energy", "--csv", "--plant", "westerly").out();
+        assertTrue(csv.lines().count() > 1);
+        csv.lines().skip(1).forEach(line -> assertTrue(line.matches(".*,,,,,,,,,,0,\\d+"), line));
+        List<String> text = office("energy", "--plant", "westerly").out().lines().toList();
+        assertTrue(text.stream().allMatch(line -> line.contains("- MWh a year, best remedies save - MWh")),
+                text.toString());
+        String names = String.join(" ", office("rank", "--csv").out().lines().map(line -> line.split(",")[1])
+                .distinct().toList());
+        assertTrue(office("energy").out().lines().allMatch(line ->
+                Stream.of(names.split(" ")).anyMatch(line::contains)), names);
     }
 }

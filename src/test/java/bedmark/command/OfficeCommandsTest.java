@@ -327,4 +327,19 @@ class OfficeCommandsTest {
         assertTrue(office("energy").out().lines().allMatch(line ->
                 Stream.of(names.split(" ")).anyMatch(line::contains)), names);
     }
+
+    @Test
+    void aMappedColumnThatIsNotThereOrHoldsNothingKnownIsRefused() throws IOException {
+        received();
+        String table = Files.writeString(folder.resolve("areas.csv"), "id,label\na1,North\n").toString();
+        Result head = office("import-register", table, "--map", "lable=name");
+        assertEquals(3, head.code());
+        assertTrue(head.err().contains("lable") && head.err().contains("id, label"), head.err());
+        Result key = office("import-register", table, "--map", "label=nmae");
+        assertEquals(3, key.code());
+        assertTrue(key.err().contains("nmae") && key.err().contains("id, name"), key.err());
+        Result right = office("import-register", table, "--map", "label=name");
+        assertEquals(0, right.code(), right::err);
+        assertTrue(right.out().lines().noneMatch(line -> line.endsWith(" ")), right.out());
+    }
 }

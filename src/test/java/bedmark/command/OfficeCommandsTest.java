@@ -161,6 +161,7 @@ class OfficeCommandsTest {
             Result help = Terminal.run("office", command, "--help");
             assertEquals(0, help.code());
             assertTrue(help.out().startsWith("Usage: bedmark office " + command), help::out);
+            assertTrue(command.equals("action") || help.out().contains("Exit codes: 0 "), help::out);
         }
         assertEquals(2, Terminal.run("office").code());
     }
@@ -341,5 +342,37 @@ class OfficeCommandsTest {
         Result right = office("import-register", table, "--map", "label=name");
         assertEquals(0, right.code(), right::err);
         assertTrue(right.out().lines().noneMatch(line -> line.endsWith(" ")), right.out());
+    }
+
+    @Test
+    void aNumberThatIsOutOfRangeIsNamedWithItsRange() {
+        assertTrue(office("rank", "--limit", "0").err().contains("--limit is a number of zones from 1 on, not 0"));
+        assertTrue(office("rank", "--older-than", "-1").err().contains("from 0 on, not -1"));
+        assertTrue(office("rank", "--stale-after", "0").err().contains("--stale-after"));
+    }
+
+    @Test
+    void aFolderWithoutPacksIsSaidToHaveNone() throws IOException {
+        Path empty = Files.createDirectory(folder.resolve("empty"));
+        Result result = office("receive", empty.toString());
+        assertEquals(0, result.code(), result::err);
+        assertTrue(result.out().contains(empty + ": there were no packs"), result::out);
+    }
+
+    @Test
+    void aTrustThatIsNoFingerprintIsBadUseOfAReceipt() {
+        received();
+        Path tablet = folder.resolve("tablet");
+        assertEquals(2, Terminal.run("store", "receipt", tablet.toString(), packs.toString(), "--trust", "nonsense")
+                .code());
+    }
+
+    @Test
+    void anOfficeWithoutPlantsSaysThatItKnowsNoneYet() {
+        for (String command : List.of("round", "export-register")) {
+            Result refused = office(command, "--out", folder.resolve("out.round.json").toString());
+            assertEquals(3, refused.code());
+            assertTrue(refused.err().contains("knows no plant yet"), refused.err());
+        }
     }
 }

@@ -82,7 +82,8 @@ final class OfficeEnergyCommand implements Callable<Integer> {
                 known(bar) ? wording.format().computed(bar.savedWh() / 1e6, 1) : "-",
                 bar.cost().isPresent() ? wording.format().computed(bar.cost().getAsDouble(), 0) + " "
                         + bar.currency().orElse("") : "-",
-                bar.co2().isPresent() ? wording.format().computed(bar.co2().getAsDouble() / 1000, 1) : "-")).stripTrailing());
+                bar.co2().isPresent() ? wording.format().computed(bar.co2().getAsDouble() / 1000, 1) : "-"))
+                .stripTrailing());
     }
 
     /** The area of a conveyor, and the plant where there are several. */

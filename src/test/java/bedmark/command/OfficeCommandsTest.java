@@ -375,4 +375,13 @@ class OfficeCommandsTest {
             assertTrue(refused.err().contains("knows no plant yet"), refused.err());
         }
     }
+
+    @Test
+    void aPackIsNotMadeIntoAFolderThatIsNotThere() {
+        Result refused = Terminal.run("pack", "make", "sample-surveys/round-2026-03.json", "--photos",
+                "sample-surveys/photos", "--out", folder.resolve("gone/march.zip").toString(), "--store",
+                folder.resolve("tablet").toString());
+        assertEquals(3, refused.code());
+        assertTrue(refused.err().contains("gone") && !refused.err().contains("queued"), refused.err());
+    }
 }

@@ -9,6 +9,7 @@ final class OfficeCommands {
 
     static CommandLine line(Surroundings surroundings) {
         return new CommandLine(new Group.OfficeGroup())
+                .addSubcommand(new OfficeNameCommand(surroundings))
                 .addSubcommand(new OfficeReceiveCommand(surroundings))
                 .addSubcommand(new OfficeRankCommand(surroundings))
                 .addSubcommand(new OfficeTrendCommand(surroundings))

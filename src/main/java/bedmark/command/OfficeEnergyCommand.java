@@ -12,6 +12,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
@@ -20,7 +22,9 @@ import picocli.CommandLine.Spec;
 
 /** The plant in energy. */
 @Command(name = "energy", mixinStandardHelpOptions = true,
-        description = "Lists what the skirts take in a year by conveyor or area, with what the best remedies save.")
+        description = "Lists what the skirts take in a year by conveyor or area, with what the best remedies save.",
+        footer = {"", "Exit codes: 0 listed; 2 bad use; 3 unreadable store.",
+            "What no survey tells is a dash in the list and an empty cell in CSV."})
 final class OfficeEnergyCommand implements Callable<Integer> {
     private static final int WIDTH = 30;
 
@@ -62,26 +66,42 @@ final class OfficeEnergyCommand implements Callable<Integer> {
             bars.forEach(bar -> surroundings.out().print(Csv.row(cells(bar))));
         } else {
             double most = bars.isEmpty() ? 0 : bars.get(0).wh();
-            bars.forEach(bar -> print(bar, most));
+            boolean plants = bars.stream().map(PlantEnergy.Bar::plant).distinct().count() > 1;
+            bars.forEach(bar -> print(bar, most, plants));
         }
         surroundings.out().flush();
         return ExitCode.FINE;
     }
 
-    private void print(PlantEnergy.Bar bar, double most) {
+    private void print(PlantEnergy.Bar bar, double most, boolean plants) {
         Wording wording = surroundings.wording();
         int length = most > 0 ? (int) Math.round(WIDTH * bar.wh() / most) : 0;
         surroundings.out().println(Wording.plain(wording.text("office.energy.line",
-                "#".repeat(length) + " ".repeat(WIDTH - length), bar.name(), bar.area(),
-                wording.format().computed(bar.wh() / 1e6, 1), wording.format().computed(bar.savedWh() / 1e6, 1),
+                "#".repeat(length) + " ".repeat(WIDTH - length), bar.name(), where(bar, plants),
+                known(bar) ? wording.format().computed(bar.wh() / 1e6, 1) : "-",
+                known(bar) ? wording.format().computed(bar.savedWh() / 1e6, 1) : "-",
                 bar.cost().isPresent() ? wording.format().computed(bar.cost().getAsDouble(), 0) + " "
                         + bar.currency().orElse("") : "-",
-                bar.co2().isPresent() ? wording.format().computed(bar.co2().getAsDouble() / 1000, 1) : "-")));
+                bar.co2().isPresent() ? wording.format().computed(bar.co2().getAsDouble() / 1000, 1) : "-"))
+                .stripTrailing());
+    }
+
+    /** The area of a conveyor, and the plant where there are several. */
+    private String where(PlantEnergy.Bar bar, boolean plants) {
+        return Stream.of(byArea ? "" : bar.area(), plants ? bar.plant() : "").filter(part -> !part.isBlank())
+                .collect(Collectors.joining(", "));
+    }
+
+    /** Whether any zone has a figure: without one the sum is not nothing, but unknown. */
+    private static boolean known(PlantEnergy.Bar bar) {
+        return bar.zones() > 0;
     }
 
     private static List<String> cells(PlantEnergy.Bar bar) {
-        return List.of(bar.plant(), bar.area(), bar.name(), plain(bar.wh()), bar.shaft() ? "shaft" : "electrical",
-                number(bar.cost()), bar.currency().orElse(""), number(bar.co2()), plain(bar.savedWh()),
+        boolean known = known(bar);
+        return List.of(bar.plant(), bar.area(), bar.name(), known ? plain(bar.wh()) : "",
+                !known ? "" : bar.shaft() ? "shaft" : "electrical",
+                number(bar.cost()), bar.currency().orElse(""), number(bar.co2()), known ? plain(bar.savedWh()) : "",
                 number(bar.savedCost()), bar.best().map(zone -> zone.names().tag()).orElse(""),
                 bar.best().flatMap(RankedZone::saving).map(saving -> saving.remedy()).orElse(""),
                 Integer.toString(bar.zones()), Integer.toString(bar.lacking()));

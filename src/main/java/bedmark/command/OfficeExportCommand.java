@@ -10,7 +10,9 @@ import picocli.CommandLine.Option;
 
 /** Writes everything for analysis engines. */
 @Command(name = "export", mixinStandardHelpOptions = true,
-        description = "Writes every survey with its assessment as JSON lines and as a flat table, by plant and month.")
+        description = "Writes every survey with its assessment as JSON lines and as a flat table, by plant and month.",
+        footer = {"", "Exit codes: 0 written; 2 bad use; 3 unreadable store, or the folder",
+            "is not empty or can't be written."})
 final class OfficeExportCommand implements Callable<Integer> {
     private final Surroundings surroundings;
 

@@ -18,7 +18,8 @@ import picocli.CommandLine.Option;
 
 /** Writes a register as tables. */
 @Command(name = "export-register", mixinStandardHelpOptions = true,
-        description = "Writes a plant's register as CSV tables, which import-register takes back.")
+        description = "Writes a plant's register as CSV tables, which import-register takes back.",
+        footer = {"", "Exit codes: 0 written; 2 bad use; 3 unreadable store, or a table can't be written."})
 final class OfficeExportRegisterCommand implements Callable<Integer> {
     private final Surroundings surroundings;
 

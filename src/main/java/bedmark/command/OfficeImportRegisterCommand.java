@@ -88,7 +88,7 @@ final class OfficeImportRegisterCommand implements Callable<Integer> {
     private void tell(Draft.Mapped column) {
         surroundings.out().println(Wording.plain(surroundings.words().text(column.key().isEmpty()
                 ? "office.import.unused" : "office.import.column", column.source(), column.head(), column.list(),
-                column.key(), column.unit())));
+                column.key(), column.unit())).stripTrailing());
     }
 
     private List<Path> files() throws IOException {

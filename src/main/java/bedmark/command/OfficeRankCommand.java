@@ -45,14 +45,15 @@ final class OfficeRankCommand implements Callable<Integer> {
     @Option(names = "--finding", paramLabel = "RULE", description = "Only zones with this finding.")
     private Optional<String> finding;
 
-    @Option(names = "--older-than", paramLabel = "DAYS", description = "Only zones surveyed longer ago, or never.")
+    @Option(names = "--older-than", paramLabel = "DAYS",
+            description = "Only zones surveyed longer ago (0 or more days), or never.")
     private Optional<Integer> olderThan;
 
     @Option(names = "--stale-after", paramLabel = "DAYS", defaultValue = "200",
-            description = "How long a survey that found nothing counts (default: ${DEFAULT-VALUE}).")
+            description = "How long a survey that found nothing counts, from 1 day on (default: ${DEFAULT-VALUE}).")
     private int staleAfter;
 
-    @Option(names = "--limit", paramLabel = "N", description = "Only the N worst.")
+    @Option(names = "--limit", paramLabel = "N", description = "Only the N worst, from 1 on.")
     private Optional<Integer> limit;
 
     @ArgGroup
@@ -81,10 +82,9 @@ final class OfficeRankCommand implements Callable<Integer> {
                 new ParameterException(spec.commandLine(), "--units is metric or us, not '" + units + "'"));
         Optional<Rule> rule = finding.map(code -> Rule.ofCode(code).orElseThrow(() ->
                 new ParameterException(spec.commandLine(), "--finding knows no rule '" + code + "'")));
-        if (staleAfter < 1 || limit.filter(most -> most < 1).isPresent()
-                || olderThan.filter(days -> days < 0).isPresent()) {
-            throw new ParameterException(spec.commandLine(), "a number of days or zones is out of range");
-        }
+        require(staleAfter >= 1, "--stale-after is a number of days from 1 on, not " + staleAfter);
+        limit.ifPresent(most -> require(most >= 1, "--limit is a number of zones from 1 on, not " + most));
+        olderThan.ifPresent(days -> require(days >= 0, "--older-than is a number of days from 0 on, not " + days));
         RankQuery query = RankQuery.ALL.ofPlant(plant).ofArea(area).ofMaterial(material).with(rule)
                 .olderThan(olderThan.map(Duration::ofDays)).staleAfter(Duration.ofDays(staleAfter));
         List<RankedZone> ranked;
@@ -104,6 +104,12 @@ final class OfficeRankCommand implements Callable<Integer> {
         }
         surroundings.out().flush();
         return exitCode(ranked);
+    }
+
+    private void require(boolean met, String otherwise) {
+        if (!met) {
+            throw new ParameterException(spec.commandLine(), otherwise);
+        }
     }
 
     private static int exitCode(List<RankedZone> ranked) {

@@ -56,7 +56,7 @@ final class OfficeReceiveCommand implements Callable<Integer> {
     public Integer call() {
         List<String> fingerprints = trusted.stream().map(this::fingerprint).toList();
         List<Path> files = new ArrayList<>();
-        packs.forEach(pack -> files.addAll(Files.isDirectory(pack) ? PackFolder.packs(pack) : List.of(pack)));
+        packs.forEach(pack -> files.addAll(held(pack)));
         if (receipts != null) {
             InputFile.requireFolder(receipts);
         }
@@ -68,6 +68,17 @@ final class OfficeReceiveCommand implements Callable<Integer> {
             received.forEach(one -> tell(store, one));
             return exitCode(received);
         }
+    }
+
+    private List<Path> held(Path given) {
+        if (!Files.isDirectory(given)) {
+            return List.of(given);
+        }
+        List<Path> files = PackFolder.packs(given);
+        if (files.isEmpty()) {
+            say("", "office.receive.no-packs", given);
+        }
+        return files;
     }
 
     private String fingerprint(String typed) {
@@ -104,7 +115,8 @@ final class OfficeReceiveCommand implements Callable<Integer> {
     private void confirm(OfficeStore store, Path pack, Receipt receipt) {
         Path into = receipts == null ? pack.toAbsolutePath().getParent() : receipts;
         try {
-            say("  ", "office.receive.receipt", store.write(receipt, into));
+            say("  ", "office.receive.receipt-of", store.write(receipt, into),
+                    OfficeNameCommand.named(surroundings, receipt.office().name()));
         } catch (Refused e) {
             surroundings.err().println("bedmark: " + surroundings.wording().sentence(e.defect()));
         }

@@ -54,7 +54,8 @@ final class OfficeReportCommand implements Callable<Integer> {
             description = "Units of the report (default: ${DEFAULT-VALUE}).")
     private String units;
 
-    @Option(names = "--language", paramLabel = "en|es", description = "Language of the report (default: that of here).")
+    @Option(names = "--language", paramLabel = "en|es",
+            description = "Language of the report (default: that of this machine, English where it is neither).")
     private Optional<String> language;
 
     @Option(names = "--paper", paramLabel = "a4|letter", defaultValue = "a4",

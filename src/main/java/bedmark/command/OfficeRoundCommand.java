@@ -1,9 +1,9 @@
 package bedmark.command;
 
-import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.office.OfficeStore;
 import bedmark.office.RoundDesk;
+import bedmark.office.register.RegisterDesk;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.util.List;
@@ -15,7 +15,8 @@ import picocli.CommandLine.Option;
 
 /** Writes a round file for the tablets. */
 @Command(name = "round", mixinStandardHelpOptions = true,
-        description = "Writes a signed round file: register, forms, limits, notes and last results for the tablets.")
+        description = "Writes a signed round file: register, forms, limits, notes and last results for the tablets.",
+        footer = {"", "Exit codes: 0 written; 2 bad use; 3 unreadable store, or the file can't be written."})
 final class OfficeRoundCommand implements Callable<Integer> {
     private final Surroundings surroundings;
 
@@ -41,7 +42,7 @@ final class OfficeRoundCommand implements Callable<Integer> {
                 progress)) {
             List<String> known = List.copyOf(store.registers().keySet());
             String id = plant.or(() -> known.size() == 1 ? Optional.of(known.get(0)) : Optional.empty())
-                    .orElseThrow(() -> new Refused(Defect.in("", "plant-unclear", String.join(", ", known))));
+                    .orElseThrow(() -> new Refused(RegisterDesk.unclear(known)));
             new RoundDesk(store).send(id, rounds, out, OffsetDateTime.now(surroundings.clock()), desk.person());
             progress.done();
             surroundings.out().println(surroundings.words().text("office.round.written", out,

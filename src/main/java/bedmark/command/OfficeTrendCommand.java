@@ -22,7 +22,8 @@ import picocli.CommandLine.Spec;
 
 /** One loading zone over time. */
 @Command(name = "trend", mixinStandardHelpOptions = true,
-        description = "Follows one loading zone over time: depth, drag, power and seals, with what changed.")
+        description = "Follows one loading zone over time: depth, drag, power and seals, with what changed.",
+        footer = {"", "Exit codes: 0 told; 2 bad use; 3 no such zone, or unreadable store."})
 final class OfficeTrendCommand implements Callable<Integer> {
     private final Surroundings surroundings;
 

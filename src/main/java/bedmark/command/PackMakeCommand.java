@@ -42,6 +42,9 @@ final class PackMakeCommand implements Callable<Integer> {
         byte[] text = InputFile.read(bundle);
         Bundle read = BedmarkCommand.in(bundle, () -> BundleReader.read(text));
         InputFile.requireFolder(photos);
+        if (!Files.isDirectory(out)) {
+            InputFile.requireFolder(out.toAbsolutePath().normalize().getParent());
+        }
         Path keys = store.orElseGet(OpenCommand::ownStore);
         if (Files.exists(keys)) {
             InputFile.requireFolder(keys);

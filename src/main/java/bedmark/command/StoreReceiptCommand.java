@@ -1,14 +1,13 @@
 package bedmark.command;
 
 import bedmark.dispatch.ReceiptBook;
-import bedmark.document.Defect;
-import bedmark.document.Refused;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
 import bedmark.pack.Fingerprint;
 import bedmark.pack.ReceiptReader;
 import bedmark.pack.SignedReceipt;
 import bedmark.survey.LevelWord;
+import bedmark.wording.Wording;
 import java.nio.file.Path;
 import java.util.HashSet;
 import java.util.List;
@@ -16,16 +15,22 @@ import java.util.Set;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
 
 /** Reads receipts of the office into a store. */
 @Command(name = "receipt", mixinStandardHelpOptions = true,
         description = "Reads the office's receipts: surveys that it has with the same content count as received.",
         footer = {"", "Exit codes: 0 noted; 1 the office has some surveys with another content;",
-            "3 a receipt was refused, with the reason in one line."})
+            "2 bad use; 3 a receipt was refused, with the reason in one line."})
 final class StoreReceiptCommand implements Callable<Integer> {
     private final Surroundings surroundings;
+
+    @Spec
+    private CommandSpec spec;
 
     @Parameters(index = "0", paramLabel = "DIR", description = "The store's folder.")
     private Path folder;
@@ -51,7 +56,7 @@ final class StoreReceiptCommand implements Callable<Integer> {
         Set<Fingerprint> vouched = new HashSet<>();
         for (String typed : trusted) {
             vouched.add(Fingerprint.parse(typed).orElseThrow(() ->
-                    new Refused(Defect.in("", "fingerprint-wrong", typed))));
+                    new ParameterException(spec.commandLine(), "--trust '" + typed + "' is no fingerprint")));
         }
         boolean differing = false;
         try (Store store = Store.openExisting(folder, StoreOptions.of("tablet").withClock(surroundings.clock())
@@ -63,8 +68,9 @@ final class StoreReceiptCommand implements Callable<Integer> {
                     book.requireTrusted(signed, vouched);
                     return book.note(signed, "");
                 });
-                surroundings.out().println(surroundings.words().text("queue.receipt",
-                        outcome.receipt().office().name(), outcome.received().size(), outcome.known().size()));
+                surroundings.out().println(surroundings.words().text("queue.receipt", Wording.plain(
+                        OfficeNameCommand.named(surroundings, outcome.receipt().office().name())),
+                        outcome.received().size(), outcome.known().size()));
                 if (!outcome.differing().isEmpty()) {
                     surroundings.err().println("bedmark: " + surroundings.words().text("queue.receipt-differs",
                             outcome.differing().size()));

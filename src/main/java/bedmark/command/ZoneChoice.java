@@ -25,13 +25,22 @@ final class ZoneChoice {
         return plant.isPresent();
     }
 
+    Optional<String> plant() {
+        return plant;
+    }
+
+    /** Refuses a plant that the office has no register of. */
+    void requirePlant(OfficeStore store) {
+        plant.ifPresent(id -> new KnownNames(spec, store).requirePlant(plant));
+    }
+
     /**
      * The zone that a person named by its id or tag.
      *
      * @throws Refused {@code zone-unknown}, {@code zone-in-plants} and {@code zone-tag-several} naming what fits
      */
     ZoneId zone(OfficeStore store, String named) {
-        plant.ifPresent(id -> new KnownNames(spec, store).requirePlant(plant));
+        requirePlant(store);
         List<ZoneNames> found = store.zonesNamed(named).stream()
                 .filter(one -> plant.filter(id -> !id.equals(one.zone().plant())).isEmpty()).toList();
         if (found.isEmpty()) {

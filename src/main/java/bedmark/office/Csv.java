@@ -14,6 +14,9 @@ public final class Csv {
     private static final Pattern LIKE_A_FORMULA =
             Pattern.compile("['=+@\\-\\t\\r\\n\uFF1D\uFF0B\uFF0D\uFF20].*", Pattern.DOTALL);
 
+    /** What separates cells, in some spreadsheet of some language at least, where it is not quoted. */
+    private static final Pattern SPLITTING = Pattern.compile("[\",;\\t\\r\\n]");
+
     private Csv() {
     }
 
@@ -24,7 +27,7 @@ public final class Csv {
 
     private static String cell(String text) {
         String safe = !NUMBER.matcher(text).matches() && LIKE_A_FORMULA.matcher(text).matches() ? "'" + text : text;
-        return safe.matches("(?s).*[\",\\r\\n].*") ? "\"" + safe.replace("\"", "\"\"") + "\"" : safe;
+        return SPLITTING.matcher(safe).find() ? "\"" + safe.replace("\"", "\"\"") + "\"" : safe;
     }
 
     /** Whether a cell that was read has the apostrophe before it that {@link #row} puts there. */

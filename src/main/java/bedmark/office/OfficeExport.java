@@ -4,6 +4,7 @@ import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.document.Refused;
+import bedmark.journal.Digest;
 import bedmark.json.AssessmentWriter;
 import bedmark.json.JsonWriter;
 import bedmark.journal.Progress;
@@ -31,6 +32,9 @@ import java.util.TreeMap;
  */
 public final class OfficeExport {
     private static final int AT_ONCE = 500;
+    /** How long a folder name may be before it is cut: the systems that we know take 255 bytes. */
+    private static final int LONGEST_NAME = 160;
+    private static final int HEAD_OF_NAME = 80;
     private static final DateTimeFormatter MONTH = DateTimeFormatter.ofPattern("yyyy-MM").withZone(ZoneOffset.UTC);
 
     private final OfficeStore store;
@@ -83,7 +87,7 @@ public final class OfficeExport {
             SortedMap<String, StringBuilder> json = new TreeMap<>();
             SortedMap<String, StringBuilder> table = new TreeMap<>();
             for (FlatRow row : store.rows(digests.subList(from, Math.min(digests.size(), from + AT_ONCE)))) {
-                String part = "plant=" + URLEncoder.encode(row.copy().zone().plant(), StandardCharsets.UTF_8)
+                String part = "plant=" + folderName(row.copy().zone().plant())
                         + "/month=" + MONTH.format(Instant.ofEpochMilli(row.copy().moment()));
                 json.computeIfAbsent(part, key -> new StringBuilder()).append(line(row)).append('\n');
                 table.computeIfAbsent(part, key -> new StringBuilder()).append(Csv.row(FlatColumn.ALL.stream()
@@ -95,6 +99,13 @@ public final class OfficeExport {
         }
         progress.at(digests.size(), digests.size());
         return digests.size();
+    }
+
+    /** A name of its own for each plant: a long id is cut, and what follows {@code ~} tells it from others like it. */
+    static String folderName(String plant) {
+        String name = URLEncoder.encode(plant, StandardCharsets.UTF_8);
+        return name.length() <= LONGEST_NAME ? name : name.substring(0, HEAD_OF_NAME) + "~"
+                + Digest.of(plant.getBytes(StandardCharsets.UTF_8)).hex();
     }
 
     private static void append(Path folder, String name, SortedMap<String, StringBuilder> parts, String head)

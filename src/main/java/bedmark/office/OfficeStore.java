@@ -67,7 +67,7 @@ public final class OfficeStore implements AutoCloseable {
     private final Desk desk;
     private final Closeable lock;
     private final PackShelf shelf;
-    private final Device device;
+    private volatile Device device;
     private final Books books;
     private final Judge judge;
     private final Results results;
@@ -470,6 +470,22 @@ public final class OfficeStore implements AutoCloseable {
 
     public Device device() {
         return device;
+    }
+
+    /**
+     * Gives the office, or this desk, the name that its receipts and round files carry from now on.
+     *
+     * @throws Refused {@code store-…} where it can't be written
+     */
+    public void rename(String name) {
+        desk.call(() -> {
+            try {
+                device = new DeviceFile(folder, options.files(), OFFICE).write(Optional.of(device.id()), name);
+                return true;
+            } catch (IOException e) {
+                throw new Refused(Fault.defect("store", e, options.files(), folder), e);
+            }
+        });
     }
 
     /** What was not as it was written when the store was opened. */

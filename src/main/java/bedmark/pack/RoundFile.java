@@ -53,7 +53,7 @@ public record RoundFile(Branch document, Fingerprint fingerprint) {
      * @param document all keys but {@code key} and {@code signature}
      * @param out      the file, in a folder that exists
      * @return the file's exact bytes
-     * @throws Refused what {@link RoundText#read} would refuse, {@code round-file-not-saved}
+     * @throws Refused what {@link RoundText#read} would refuse, {@code folder-absent}, {@code round-file-…}
      */
     public static byte[] write(Branch document, DeviceKey office, Path out) {
         byte[] text = SignedJson.text(document, office);
@@ -67,7 +67,7 @@ public record RoundFile(Branch document, Fingerprint fingerprint) {
             new SafeFile(disk, target, false).write(file -> file.write(text));
             return text;
         } catch (IOException e) {
-            throw new Refused(Fault.defect("store", e, disk, target.getParent()), e);
+            throw new Refused(Fault.defect("round-file", e, disk, target.getParent()), e);
         }
     }
 }

@@ -7,6 +7,7 @@ import bedmark.command.Terminal.Result;
 import bedmark.document.Branch;
 import bedmark.json.JsonReader;
 import bedmark.office.Offices;
+import bedmark.survey.Bundle;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -160,6 +161,7 @@ class OfficeCommandsTest {
             Result help = Terminal.run("office", command, "--help");
             assertEquals(0, help.code());
             assertTrue(help.out().startsWith("Usage: bedmark office " + command), help::out);
+            assertTrue(command.equals("action") || help.out().contains("Exit codes: 0 "), help::out);
         }
         assertEquals(2, Terminal.run("office").code());
     }
@@ -174,6 +176,7 @@ class OfficeCommandsTest {
         String office = folder.resolve("office").toString();
         Result sound = Terminal.run("office", "check", office);
         assertEquals(0, sound.code(), sound::err);
+        assertTrue(sound.out().startsWith("2 packs, "), sound::out);
         assertEquals(0, Terminal.run("office", "rebuild", office).code());
         try (var files = Files.list(folder.resolve("office/packs"))) {
             Files.delete(files.findFirst().orElseThrow());
@@ -267,5 +270,123 @@ class OfficeCommandsTest {
         assertEquals(0, office("action", "TP-08", "--text", "Renew", "--plant", "westerly").code());
         assertTrue(office("action").out().contains(",westerly,TP-08,"));
         assertEquals(2, office("action", "--plant", "westerly").code());
+    }
+
+    @Test
+    void conflictsAreListedWithTheDigestByWhichEachSideIsChosen() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        Branch original = bundle.document().branches("surveys").get(0);
+        Offices.pack(Offices.with(bundle, "two", "2026-03-18T14:00:00+01:00",
+                List.of(original.with("notes", "told otherwise"))), folder.resolve("tablet"), packs.resolve("c.zip"));
+        assertEquals("No conflict waits.", office("settle").out().strip());
+        assertEquals(1, received().code());
+        Result text = office("settle");
+        assertEquals(0, text.code(), text::err);
+        Branch conflict = JsonReader.read(office("settle", "--json").out().getBytes(StandardCharsets.UTF_8)).root();
+        assertEquals("same-revision", conflict.text("kind").orElseThrow());
+        assertEquals(original.text("transfer"), conflict.text("transfer"));
+        assertEquals(2, conflict.branches("sides").size());
+        conflict.branches("sides").forEach(side -> assertTrue(text.out().lines().anyMatch(line ->
+                line.contains(side.text("digest").orElseThrow())
+                        && line.contains(original.text("inspector").orElseThrow())), text::out));
+        assertEquals(4, text.out().lines().count(), text::out);
+        String zone = conflict.text("transfer").orElseThrow();
+        String side = conflict.branches("sides").get(1).text("digest").orElseThrow();
+        assertEquals(2, office("settle", zone, side).code());
+        assertEquals(2, office("settle", "--reason", "r").code());
+        assertEquals(0, office("settle", zone, side, "--reason", "r", "--person", "Ida Marsh").code());
+        assertEquals("", office("settle", "--json").out());
+    }
+
+    @Test
+    void anOfficeIsNamedAndItsReceiptsCarryTheName() throws IOException {
+        assertEquals(0, received().code());
+        assertEquals("without a name", office("name").out().strip());
+        assertEquals(2, office("name", " ").code());
+        assertEquals("Ostermere works office", office("name", "Ostermere works office").out().strip());
+        assertTrue(office("receive", packs.toString()).out().contains("Ostermere works office"));
+        try (var files = Files.list(packs)) {
+            for (Path file : files.filter(one -> one.toString().endsWith(".receipt.json")).toList()) {
+                assertTrue(Files.readString(file).contains("Ostermere works office"), file.toString());
+            }
+        }
+        assertEquals("Ostermere works office", office("name").out().strip());
+    }
+
+    @Test
+    void energyThatNothingTellsIsUnknownAndPlantsAreToldApart() {
+        received();
+        assertTrue(!office("energy").out().contains("Ostermere"), "one plant needs no name");
+        office("energy", "--by-area").out().lines().forEach(line ->
+                assertTrue(line.split("Biomass yard", -1).length <= 2, line));
+        String tables = folder.resolve("tables").toString();
+        assertEquals(0, office("export-register", "--out", tables).code());
+        assertEquals(0, office("import-register", tables, "--plant", "westerly").code());
+        String csv = office("energy", "--csv", "--plant", "westerly").out();
+        assertTrue(csv.lines().count() > 1);
+        csv.lines().skip(1).forEach(line -> assertTrue(line.matches(".*,,,,,,,,,,0,\\d+"), line));
+        List<String> text = office("energy", "--plant", "westerly").out().lines().toList();
+        assertTrue(text.stream().allMatch(line -> line.contains("- MWh a year, best remedies save - MWh")),
+                text.toString());
+        String names = String.join(" ", office("rank", "--csv").out().lines().map(line -> line.split(",")[1])
+                .distinct().toList());
+        assertTrue(office("energy").out().lines().allMatch(line ->
+                Stream.of(names.split(" ")).anyMatch(line::contains)), names);
+    }
+
+    @Test
+    void aMappedColumnThatIsNotThereOrHoldsNothingKnownIsRefused() throws IOException {
+        received();
+        String table = Files.writeString(folder.resolve("areas.csv"), "id,label\na1,North\n").toString();
+        Result head = office("import-register", table, "--map", "lable=name");
+        assertEquals(3, head.code());
+        assertTrue(head.err().contains("lable") && head.err().contains("id, label"), head.err());
+        Result key = office("import-register", table, "--map", "label=nmae");
+        assertEquals(3, key.code());
+        assertTrue(key.err().contains("nmae") && key.err().contains("id, name"), key.err());
+        Result right = office("import-register", table, "--map", "label=name");
+        assertEquals(0, right.code(), right::err);
+        assertTrue(right.out().lines().noneMatch(line -> line.endsWith(" ")), right.out());
+    }
+
+    @Test
+    void aNumberThatIsOutOfRangeIsNamedWithItsRange() {
+        assertTrue(office("rank", "--limit", "0").err().contains("--limit is a number of zones from 1 on, not 0"));
+        assertTrue(office("rank", "--older-than", "-1").err().contains("from 0 on, not -1"));
+        assertTrue(office("rank", "--stale-after", "0").err().contains("--stale-after"));
+    }
+
+    @Test
+    void aFolderWithoutPacksIsSaidToHaveNone() throws IOException {
+        Path empty = Files.createDirectory(folder.resolve("empty"));
+        Result result = office("receive", empty.toString());
+        assertEquals(0, result.code(), result::err);
+        assertTrue(result.out().contains(empty + ": there were no packs"), result::out);
+    }
+
+    @Test
+    void aTrustThatIsNoFingerprintIsBadUseOfAReceipt() {
+        received();
+        Path tablet = folder.resolve("tablet");
+        assertEquals(2, Terminal.run("store", "receipt", tablet.toString(), packs.toString(), "--trust", "nonsense")
+                .code());
+    }
+
+    @Test
+    void anOfficeWithoutPlantsSaysThatItKnowsNoneYet() {
+        for (String command : List.of("round", "export-register")) {
+            Result refused = office(command, "--out", folder.resolve("out.round.json").toString());
+            assertEquals(3, refused.code());
+            assertTrue(refused.err().contains("knows no plant yet"), refused.err());
+        }
+    }
+
+    @Test
+    void aPackIsNotMadeIntoAFolderThatIsNotThere() {
+        Result refused = Terminal.run("pack", "make", "sample-surveys/round-2026-03.json", "--photos",
+                "sample-surveys/photos", "--out", folder.resolve("gone/march.zip").toString(), "--store",
+                folder.resolve("tablet").toString());
+        assertEquals(3, refused.code());
+        assertTrue(refused.err().contains("gone") && !refused.err().contains("queued"), refused.err());
     }
 }

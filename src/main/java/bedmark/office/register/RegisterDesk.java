@@ -9,6 +9,7 @@ import bedmark.json.Canonical;
 import bedmark.office.OfficeStore;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Register;
+import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
 
@@ -30,7 +31,7 @@ public final class RegisterDesk {
     public Branch head(Optional<String> plant, List<Branch> forms) {
         List<String> known = List.copyOf(store.registers().keySet());
         if (plant.isEmpty() && known.size() != 1) {
-            throw new Refused(Defect.in("", "plant-unclear", String.join(", ", known)));
+            throw new Refused(unclear(known));
         }
         String id = plant.orElseGet(() -> known.get(0));
         return store.head(id).orElseGet(() -> Branch.EMPTY
@@ -66,5 +67,11 @@ public final class RegisterDesk {
         if (!store.head(id).equals(Optional.of(head))) {
             store.act(person, new OfficeDeed.RegisterChanged(id, head, why), base);
         }
+    }
+
+    /** What to refuse where the plant must be named, by the ids that the office knows. */
+    public static Defect unclear(Collection<String> known) {
+        return known.isEmpty() ? Defect.in("", "plant-none")
+                : Defect.in("", "plant-unclear", String.join(", ", known));
     }
 }

@@ -18,6 +18,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeSet;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
@@ -89,7 +90,27 @@ public final class RegisterImport {
         tables.stream().filter(table -> !meanings.lists().containsKey(table.source()) && work.list(table).isEmpty())
                 .forEach(table -> work.defects.add(Defect.in(table.source(), "table-unknown", table.name(),
                         String.join(", ", Column.LISTS.keySet()))));
+        work.requireUsed(tables);
         return work.draft();
+    }
+
+    /** A name for a column that no table has, or of nothing that a table can hold, was mistyped. */
+    private void requireUsed(List<Table> tables) {
+        Set<String> heads = new TreeSet<>();
+        Set<String> keys = new TreeSet<>();
+        for (Table table : tables) {
+            list(table.name()).ifPresent(list -> {
+                table.rows().stream().limit(1).forEach(row -> row.cells().forEach(cell -> heads.add(cell.text())));
+                Column.LISTS.get(list).forEach(column -> keys.add(column.key()));
+            });
+        }
+        renamed.forEach((head, named) -> {
+            if (!heads.contains(head)) {
+                defects.add(Defect.in(head, "map-head-unknown", String.join(", ", heads)));
+            } else if (mapping.stream().noneMatch(one -> one.head().equals(head) && !one.key().isEmpty())) {
+                defects.add(Defect.in(head, "map-key-unknown", named, String.join(", ", keys)));
+            }
+        });
     }
 
     /**

@@ -99,12 +99,12 @@ public final class RegisterImport {
         Set<String> heads = new TreeSet<>();
         Set<String> keys = new TreeSet<>();
         for (Table table : tables) {
-            list(table.name()).ifPresent(list -> {
+            Optional.ofNullable(Column.LISTS.get(list(table))).ifPresent(columns -> {
                 table.rows().stream().limit(1).forEach(row -> row.cells().forEach(cell -> heads.add(cell.text())));
-                Column.LISTS.get(list).forEach(column -> keys.add(column.key()));
+                columns.forEach(column -> keys.add(column.key()));
             });
         }
-        renamed.forEach((head, named) -> {
+        meanings.heads().forEach((head, named) -> {
             if (!heads.contains(head)) {
                 defects.add(Defect.in(head, "map-head-unknown", String.join(", ", heads)));
             } else if (mapping.stream().noneMatch(one -> one.head().equals(head) && !one.key().isEmpty())) {

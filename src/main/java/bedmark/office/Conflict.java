@@ -1,9 +1,12 @@
 package bedmark.office;
 
+import bedmark.engine.Assessment;
 import bedmark.engine.verdict.Level;
 import bedmark.index.office.ZoneNames;
 import bedmark.office.FlatColumn.FlatRow;
+import bedmark.survey.Act;
 import bedmark.survey.InspectionStatus;
+import bedmark.survey.OfficeDeed;
 import bedmark.survey.Survey;
 import bedmark.survey.merge.Clash;
 import bedmark.survey.merge.Copy;
@@ -25,13 +28,14 @@ public record Conflict(ZoneNames names, Clash.Kind kind, List<Side> sides) {
     /**
      * One of the contents that can't all be right.
      *
-     * @param level its verdict; nothing where it can't be judged
+     * @param device the tablet whose pack brought it first; its key where it has no name
+     * @param judged by the register that it was made with; nothing where it can't be judged
      */
-    public record Side(Copy copy, Survey survey, Optional<Level> level) {
-        private static Side of(FlatRow row) {
-            return new Side(row.copy(), row.survey(), row.judged().filter(one ->
-                    row.survey().inspectionStatus() == InspectionStatus.INSPECTED).map(one ->
-                    one.assessment().level()));
+    public record Side(Copy copy, Survey survey, String device, Optional<Assessment> judged) {
+
+        /** Its verdict; nothing where it can't be judged. */
+        public Optional<Level> level() {
+            return judged.map(Assessment::level);
         }
     }
 
@@ -56,8 +60,25 @@ public record Conflict(ZoneNames names, Clash.Kind kind, List<Side> sides) {
         return conflicts;
     }
 
-    private static Conflict of(OfficeStore store, ZoneNames names, Clash clash) {
+    /** A conflict of a zone, with what its sides hold. */
+    public static Conflict of(OfficeStore store, ZoneNames names, Clash clash) {
         return new Conflict(names, clash.kind(), store.rows(clash.sides().stream().map(Copy::digest).toList())
-                .stream().map(Side::of).toList());
+                .stream().map(row -> side(store, row)).toList());
+    }
+
+    private static Side side(OfficeStore store, FlatRow row) {
+        Optional<String> pack = store.ask(tables -> tables.packOf(row.copy().digest()));
+        String device = store.packs().stream().map(entry -> ((Act.OfficeActed) entry.act()).deed())
+                .map(OfficeDeed.PackReceived.class::cast)
+                .filter(received -> pack.equals(Optional.of(received.sha256()))).findFirst()
+                .map(received -> received.deviceName().isBlank() ? received.fingerprint() : received.deviceName())
+                .orElse("");
+        return new Side(row.copy(), row.survey(), device, row.judged().filter(one ->
+                row.survey().inspectionStatus() == InspectionStatus.INSPECTED).map(JudgedZone::assessment));
+    }
+
+    /** What the sides say differently. */
+    public List<Difference> differences() {
+        return Difference.among(sides.stream().map(Side::survey).toList());
     }
 }

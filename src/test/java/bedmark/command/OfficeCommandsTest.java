@@ -250,7 +250,7 @@ class OfficeCommandsTest {
     /** The tables that were written are made those of another plant, as a person would. */
     private void ofWesterly() throws IOException {
         Path plant = folder.resolve("tables/plant.csv");
-        Files.writeString(plant, Files.readString(plant).replace("ostermere,", "westerly,"));
+        Files.writeString(plant, Files.readString(plant).replace("ostermere,Ostermere", "westerly,Westerly"));
     }
 
     @Test

@@ -1,13 +1,14 @@
 package bedmark.screen.office;
 
+import bedmark.document.Branch;
 import bedmark.engine.verdict.Rule;
 import bedmark.office.Actions;
+import bedmark.office.Conflict;
 import bedmark.office.Findings;
 import bedmark.office.JudgedZone;
 import bedmark.office.RankedZone;
 import bedmark.office.trend.ZoneTrend;
 import bedmark.survey.OfficeDeed;
-import bedmark.survey.merge.Clash;
 import bedmark.survey.merge.ZoneId;
 import java.time.LocalDate;
 import java.util.List;
@@ -26,9 +27,10 @@ public final class ZoneStoryModel {
      *
      * @param own   the latest result by the register that it was made with
      * @param today the same by today's
+     * @param forms of its plant, by which readings are named
      */
     public record Story(RankedZone ranked, ZoneTrend trend, Optional<JudgedZone> own, Optional<JudgedZone> today,
-                        List<Clash> clashes, List<OfficeDeed.ActionSet> actions) {
+                        List<Conflict> conflicts, List<Branch> forms, List<OfficeDeed.ActionSet> actions) {
     }
 
     ZoneStoryModel(OfficeDesk desk, ZoneId zone) {
@@ -39,7 +41,9 @@ public final class ZoneStoryModel {
 
     private Optional<Story> read() {
         return desk.store().ranked(zone).map(ranked -> new Story(ranked, desk.store().trend(zone),
-                desk.store().judged(zone), desk.store().judgedToday(zone), desk.store().merged(zone).clashes(),
+                desk.store().judged(zone), desk.store().judgedToday(zone), desk.store().merged(zone).clashes().stream()
+                .map(clash -> Conflict.of(desk.store(), ranked.names(), clash)).toList(),
+                desk.store().head(zone.plant()).map(head -> head.branches("forms")).orElse(List.of()),
                 new Actions(desk.store()).open(zone)));
     }
 

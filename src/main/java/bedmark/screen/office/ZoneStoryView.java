@@ -15,11 +15,7 @@ import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Icon;
 import bedmark.screen.theme.LevelGlyph;
 import bedmark.survey.OfficeDeed;
-import bedmark.survey.merge.Clash;
-import bedmark.survey.merge.Copy;
 import bedmark.wording.Wording;
-import java.time.Instant;
-import java.time.ZoneOffset;
 import java.util.Optional;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
@@ -87,7 +83,7 @@ final class ZoneStoryView extends ScrollPane {
         content.getChildren().clear();
         model.storyProperty().get().ifPresent(story -> content.getChildren().addAll(head(story), chart(story),
                 findings(story), actions(story)));
-        model.storyProperty().get().filter(story -> !story.clashes().isEmpty()).ifPresent(story ->
+        model.storyProperty().get().filter(story -> !story.conflicts().isEmpty()).ifPresent(story ->
                 content.getChildren().add(clashes(story)));
     }
 
@@ -252,19 +248,8 @@ final class ZoneStoryView extends ScrollPane {
     private Node clashes(Story story) {
         VBox box = section("office.story.clashes");
         box.getChildren().add(clashReason);
-        for (Clash clash : story.clashes()) {
-            FlowPane sides = new FlowPane();
-            sides.getStyleClass().add("sides");
-            for (Copy side : clash.sides()) {
-                VBox card = new VBox(Texts.wrapped(wording.text("office.story.side", side.revision(),
-                        Instant.ofEpochMilli(side.moment()).atZone(ZoneOffset.UTC).toLocalDate(),
-                        side.digest().substring(0, 12))), button("settle-" + side.digest().substring(0, 12),
-                        "office.story.counts", () -> model.settle(side.digest(), clashReason.getText())));
-                card.getStyleClass().add("side-card");
-                sides.getChildren().add(card);
-            }
-            box.getChildren().add(sides);
-        }
+        story.conflicts().forEach(conflict -> box.getChildren().add(new ConflictView(conflict, story.forms(), wording,
+                digest -> model.settle(digest, clashReason.getText()))));
         return box;
     }
 }

@@ -8,8 +8,11 @@ import bedmark.document.Branch;
 import bedmark.office.Answered;
 import bedmark.office.Offices;
 import bedmark.office.RankedZone;
+import bedmark.quantity.Quantity;
+import bedmark.quantity.Unit;
 import bedmark.screen.Glass;
 import bedmark.survey.Bundle;
+import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -215,8 +218,10 @@ class OfficeWindowTest {
     @Test
     void aConflictIsShownSideBySideAndDecided() throws Exception {
         Bundle bundle = Offices.sample("round-under-way");
-        Branch survey = bundle.document().branches("surveys").stream().filter(one -> one.text("transfer").get()
-                .equals("TP-08")).findFirst().orElseThrow().with("notes", "told otherwise").without("photos");
+        Branch held = bundle.document().branches("surveys").stream().filter(one -> one.text("transfer").get()
+                .equals("TP-08")).findFirst().orElseThrow();
+        Branch survey = held.with("notes", "told otherwise").without("photos").with("readings", held.branch("readings")
+                .orElseThrow().with("loadingZoneLength", Quantity.of(new BigDecimal("9.75"), Unit.METRE)));
         Offices.pack(Offices.with(bundle, "other", "2026-09-22T17:00:00+02:00", List.of(survey)),
                 folder.resolve("tablet"), packs.resolve("z.zip"));
         try (OfficeWindow window = window(1280, 800)) {
@@ -228,6 +233,10 @@ class OfficeWindowTest {
                 return null;
             });
             window.until(() -> window.words().contains("This one counts"));
+            for (String told : List.of("told otherwise", "9.75", "skirted length", "drag of the skirts",
+                    "By Mira Tolland, from ")) {
+                assertTrue(window.words().contains(told), told + ": " + window.words());
+            }
             window.click("clash-reason");
             window.type("the first was signed off");
             window.click("settle-" + window.desk().store().merged(zone.zone()).clashes().get(0).sides().get(0)

@@ -21,6 +21,7 @@ import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.OptionalLong;
 import java.util.UUID;
 import java.util.stream.Stream;
@@ -86,6 +87,31 @@ class ZoneTrendTest {
         assertEquals(new Outlook.TooFew(4, 5), depth(trend).outlook());
         assertEquals(Interval.Reason.TOO_FEW, trend.interval().reason());
         assertEquals(Interval.MOST, trend.interval().days());
+    }
+
+    private static Interval interval(int... depthsMm) {
+        List<JudgedZone> zones = new ArrayList<>();
+        for (int depth : depthsMm) {
+            zones.add(survey(LocalDate.of(2025, 1, 1).plusMonths(zones.size()), depth, ""));
+        }
+        return ZoneTrend.of(ZONE, zones, List.of(), 0).interval();
+    }
+
+    @Test
+    void aZoneThatIsOverloadedIsLookedAtMostOften() {
+        Interval shortest = new Interval(Interval.LEAST, Interval.Reason.OVERLOADED, OptionalDouble.empty());
+        assertEquals(shortest, interval(280), "one survey is enough to say so");
+        assertEquals(shortest, interval(280, 281, 279, 280, 282, 278), "with no trend as well");
+        assertEquals(shortest, interval(340, 330, 320, 310, 300, 290), "even where it falls");
+        assertEquals(Interval.Reason.OVERLOADED, interval(230, 240, 250, 260, 270, 280).reason());
+        assertEquals(Interval.Reason.TOO_FEW, interval(280, 150).reason(), "but not where it was mended");
+    }
+
+    @Test
+    void aZoneThatIsNearALimitDoesNotWaitAsLongAsSitesGo() {
+        Interval half = new Interval(91, Interval.Reason.NEAR_A_LIMIT, OptionalDouble.empty());
+        assertEquals(half, interval(230));
+        assertEquals(half, interval(230, 229, 231, 230, 228, 232));
     }
 
     @Test

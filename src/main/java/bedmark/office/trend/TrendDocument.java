@@ -72,9 +72,14 @@ public final class TrendDocument {
     }
 
     private static Branch reached(Outlook.Reached reached) {
-        Branch branch = Branch.EMPTY.with("expected", reached.expected().toString())
-                .with("earliest", reached.earliest().toString());
-        return reached.latest().isPresent() ? branch.with("latest", reached.latest().get().toString()) : branch;
+        return end(end(end(Branch.EMPTY, "expected", reached.expected()), "earliest", reached.earliest()), "latest",
+                reached.latest());
+    }
+
+    /** A day; where there is none, why: later than ten years after the last survey, or never. */
+    private static Branch end(Branch branch, String key, Outlook.When when) {
+        return when.day().map(day -> branch.with(key, day.toString()))
+                .orElseGet(() -> branch.with(key + "Is", when instanceof Outlook.Beyond ? "beyond-ten-years" : "never"));
     }
 
     private static Branch number(Branch branch, String key, OptionalDouble value) {

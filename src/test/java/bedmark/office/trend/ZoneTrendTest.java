@@ -127,7 +127,7 @@ class ZoneTrendTest {
                 new Outlook.Beyond(), new Outlook.On(LocalDate.of(2027, 5, 6)), new Outlook.Beyond()))));
         ZoneTrend trend = new ZoneTrend(ZONE, List.of(series), List.of(), new Interval(7, Interval.Reason.OVERLOADED,
                 OptionalDouble.empty()), 0);
-        Branch outlook = TrendDocument.of(trend).branches("series").get(0).branch("outlook").orElseThrow();
+        Branch outlook = TrendDocument.of(trend, Optional.empty(), Optional.empty()).branches("series").get(0).branch("outlook").orElseThrow();
         assertEquals(Plants.read("{'expected':'2027-01-02','earliest':'2026-01-02','latestIs':'never'}"),
                 outlook.branch("nearReached").orElseThrow());
         assertEquals(Plants.read("{'expectedIs':'beyond-ten-years','earliest':'2027-05-06',"

@@ -58,13 +58,13 @@ final class OfficeTrendCommand implements Callable<Integer> {
                 progress)) {
             ZoneId zone = zones.zone(store, transfer);
             ZoneTrend trend = store.trend(zone);
+            Optional<JudgedZone> own = store.judged(zone);
+            Optional<JudgedZone> today = store.judgedToday(zone);
             progress.done();
             if (json) {
-                surroundings.out().print(new String(JsonWriter.indented(TrendDocument.of(trend)),
+                surroundings.out().print(new String(JsonWriter.indented(TrendDocument.of(trend, own, today)),
                         StandardCharsets.UTF_8));
             } else {
-                Optional<JudgedZone> own = store.judged(zone);
-                Optional<JudgedZone> today = store.judgedToday(zone);
                 new TrendTelling(new Wording(surroundings.words(), system)).lines(trend, own, today)
                         .forEach(line -> surroundings.out().println(line));
             }

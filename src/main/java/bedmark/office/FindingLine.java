@@ -73,7 +73,7 @@ public record FindingLine(Rule rule, Optional<Seen> today, Optional<Seen> atDesi
     }
 
     /** Everything of an assessment that is not within its limits, today or at design feed. */
-    static List<FindingLine> of(Assessment assessment) {
+    public static List<FindingLine> of(Assessment assessment) {
         Map<Rule, Seen> today = seen(assessment.findings());
         Map<Rule, Seen> atDesign = seen(assessment.findingsAtDesign());
         return Stream.of(Rule.values()).filter(rule -> today.containsKey(rule) || atDesign.containsKey(rule))

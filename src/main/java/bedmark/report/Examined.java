@@ -5,6 +5,7 @@ import bedmark.engine.Assessment;
 import bedmark.engine.Engine;
 import bedmark.form.FieldForm;
 import bedmark.office.JudgedZone;
+import bedmark.office.Rejudged;
 import bedmark.survey.Assessor;
 import bedmark.survey.Register;
 import bedmark.survey.Survey;
@@ -18,10 +19,11 @@ import java.util.Optional;
 /**
  * The result that a zone is judged by.
  *
+ * @param today    the same by the register that holds today; nothing where it can't be judged by that
  * @param assessor judges by the register that the survey was made with
  * @param form     that the survey was made with
  */
-public record Examined(JudgedZone judged, Assessor assessor, FieldForm form) {
+public record Examined(JudgedZone judged, Optional<JudgedZone> today, Assessor assessor, FieldForm form) {
 
     public Survey survey() {
         return judged.survey();
@@ -29,6 +31,11 @@ public record Examined(JudgedZone judged, Assessor assessor, FieldForm form) {
 
     public Assessment assessment() {
         return judged.assessment();
+    }
+
+    /** Both judgements, where the register that holds today comes to another one. */
+    public Optional<Rejudged> rejudged() {
+        return today.map(other -> new Rejudged(judged, other)).filter(Rejudged::differs);
     }
 
     /** The register that the survey was made with. */

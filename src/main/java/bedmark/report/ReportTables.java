@@ -6,6 +6,7 @@ import bedmark.engine.uncertainty.Estimate;
 import bedmark.engine.verdict.Finding;
 import bedmark.engine.verdict.Level;
 import bedmark.engine.verdict.Remedy;
+import bedmark.office.JudgedZone;
 import bedmark.office.Place;
 import bedmark.office.RankedZone;
 import bedmark.quantity.Dimension;
@@ -57,6 +58,9 @@ public final class ReportTables {
         columns.code("level", row -> Cell.text(assessment(row.zone()).map(one -> one.level().code())));
         columns.code("levelAtDesignFeed", row -> Cell.text(assessment(row.zone())
                 .flatMap(Assessment::levelAtDesignFeed).map(Level::code)));
+        columns.code("levelByToday", row -> Cell.text(today(row.zone()).map(one -> one.level().code())));
+        columns.code("levelAtDesignFeedByToday", row -> Cell.text(today(row.zone())
+                .flatMap(Assessment::levelAtDesignFeed).map(Level::code)));
         columns.text("because", row -> Cell.text(words.why(row.zone())));
         columns.add("surveyedAt", "time", "", row -> Cell.moment(row.zone().examined().flatMap(Examined::at)));
         columns.number("ageDays", "d", row -> ranked(row).age().map(age -> Cell.number(age.toDays()))
@@ -95,6 +99,11 @@ public final class ReportTables {
 
     /** A finding of a zone, today or at design feed. */
     record FindingRow(ReportZone zone, Finding finding, boolean atDesign) {
+        /** The same rule at the same feed, by the register that holds today. */
+        Optional<Finding> byToday() {
+            return today(zone).flatMap(one -> (atDesign ? one.findingsAtDesign() : one.findings()).stream()
+                    .filter(other -> other.rule() == finding.rule()).findFirst());
+        }
     }
 
     private Table<?> findings() {
@@ -104,6 +113,7 @@ public final class ReportTables {
         columns.code("rule", row -> Cell.text(row.finding().code()));
         columns.text("ruleName", row -> Cell.text(words.text("rule." + row.finding().code())));
         columns.code("level", row -> Cell.text(row.finding().level().code()));
+        columns.code("levelByToday", row -> Cell.text(row.byToday().map(one -> one.level().code())));
         columns.number("observed", "", row -> Cell.number(OptionalDouble.of(row.finding().observed())));
         columns.number("observedU", "", row ->
                 Cell.number(OptionalDouble.of(row.finding().standardUncertainty())));
@@ -213,6 +223,10 @@ public final class ReportTables {
 
     private static Optional<Assessment> assessment(ReportZone zone) {
         return zone.examined().map(Examined::assessment);
+    }
+
+    private static Optional<Assessment> today(ReportZone zone) {
+        return zone.examined().flatMap(Examined::today).map(JudgedZone::assessment);
     }
 
     private static Optional<Survey> survey(ReportZone zone) {

@@ -1,5 +1,7 @@
 package bedmark.report;
 
+import bedmark.engine.verdict.Level;
+import bedmark.office.Rejudged;
 import bedmark.picture.Ink;
 import bedmark.report.paper.Flow;
 import bedmark.report.paper.Lettering;
@@ -81,9 +83,22 @@ final class SheetPages {
                                 Integer.toString(examined.survey().revision()))) : Optional.<String>empty())
                 .flatMap(Optional::stream).collect(Collectors.joining(" · "));
         flow.paragraph("P", who, Lettering.plain(8.8).soft());
+        examined.rejudged().ifPresent(both -> flow.paragraph("P", today(both), Lettering.plain(8.8)));
         flow.down(3);
         flow.leaf().rule(Ink.INK, 1.2, flow.left(), flow.y(), flow.width());
         flow.down(3);
+    }
+
+    /** How the register that holds today judges the same survey. */
+    private String today(Rejudged both) {
+        return Stream.concat(Stream.of(words.text("office.trend.judged", level(both.own().assessment().level()),
+                        level(both.today().assessment().level()))), both.turns().stream().map(turn -> words.text(
+                        "report.rejudged", words.text("rule." + turn.rule().code()), level(turn.own()),
+                        level(turn.today())))).collect(Collectors.joining(" "));
+    }
+
+    private String level(Level level) {
+        return words.text("verdict.level." + level.code());
     }
 
     private List<Block> blocks(List<SheetPart> parts, Lettering lettering) {

@@ -40,6 +40,8 @@ public final class TrendTelling {
                         one.at().atZone(ZoneOffset.UTC).toLocalDate(), value(series.measure(), one.value()),
                         value(series.measure(), 2 * one.standardUncertainty()), one.revision());
             }
+            series.near().ifPresent(limit -> say(lines, "  ", "office.trend.limit-near",
+                    value(series.measure(), limit)));
             series.overloaded().ifPresent(limit -> say(lines, "  ", "office.trend.limit",
                     value(series.measure(), limit)));
             outlook(lines, series);
@@ -96,9 +98,20 @@ public final class TrendTelling {
         }
     }
 
+    /** Where even the steepest line takes longer than ten years there is no day to tell. */
     private void reached(List<String> lines, String key, Outlook.Reached reached) {
-        say(lines, "  ", key, reached.expected(), reached.earliest(), reached.latest().map(LocalDate::toString)
-                .orElse(wording.text("office.trend.open")));
+        if (reached.earliest().day().isEmpty()) {
+            say(lines, "  ", key + "-far");
+        } else if (reached.expected().day().isEmpty()) {
+            say(lines, "  ", key + "-late", end(reached.earliest()), end(reached.latest()));
+        } else {
+            say(lines, "  ", key, end(reached.expected()), end(reached.earliest()), end(reached.latest()));
+        }
+    }
+
+    private String end(Outlook.When when) {
+        return when.day().map(LocalDate::toString).orElseGet(() -> wording.text(when instanceof Outlook.Beyond
+                ? "office.trend.beyond" : "office.trend.open"));
     }
 
     /** A value of a measure with its unit. */

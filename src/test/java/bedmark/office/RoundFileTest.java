@@ -2,6 +2,7 @@ package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -12,9 +13,13 @@ import bedmark.document.Refused;
 import bedmark.engine.verdict.Rule;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
+import bedmark.journal.Progress;
 import bedmark.json.RoundText;
 import bedmark.office.register.RegisterDesk;
+import bedmark.office.trend.TrendDocument;
 import bedmark.pack.RoundFile;
+import bedmark.report.Examined;
+import bedmark.report.ReportContent;
 import bedmark.survey.Act;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.PlannedAction;
@@ -135,6 +140,16 @@ class RoundFileTest {
                 .map(row -> (Node) row).toList());
     }
 
+    private static List<String> codes(Branch trend, String key) {
+        return trend.branch(key).orElseThrow().branches("findings").stream()
+                .map(line -> line.text("code").orElseThrow() + line.branch("today").flatMap(seen ->
+                        seen.text("level"))).toList();
+    }
+
+    private static String level(Branch trend, String key) {
+        return trend.branch(key).orElseThrow().text("level").orElseThrow();
+    }
+
     @Test
     void anOldSurveyIsJudgedByItsOwnRegisterAndByTodays() {
         sent();
@@ -151,6 +166,13 @@ class RoundFileTest {
             assertEquals(100, today.assessment().findings().stream().filter(finding ->
                     finding.rule() == Rule.BED_OVER_DESIGN).findFirst().orElseThrow().overloaded().getAsDouble());
             assertEquals(own.copy().digest(), today.copy().digest());
+            Branch told = TrendDocument.of(store.trend(zone), Optional.of(own), Optional.of(today));
+            assertNotEquals(codes(told, "judgedByOwnRegister") + level(told, "judgedByOwnRegister"),
+                    codes(told, "judgedByTodaysRegister") + level(told, "judgedByTodaysRegister"));
+            Examined examined = ReportContent.of(store, RankQuery.ALL, NOW, Progress.NONE)
+                    .orElseThrow().examined().stream().map(one -> one.examined().orElseThrow())
+                    .filter(one -> one.judged().zone().equals(zone)).findFirst().orElseThrow();
+            assertEquals(Rule.BED_OVER_DESIGN, examined.rejudged().orElseThrow().turns().get(0).rule());
         }
     }
 }

@@ -9,11 +9,13 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.engine.Result;
 import bedmark.journal.Progress;
+import bedmark.office.JudgedZone;
 import bedmark.office.OfficeStore;
 import bedmark.office.Offices;
 import bedmark.office.Place;
 import bedmark.quantity.UnitSystem;
 import bedmark.report.paper.PaperSize;
+import bedmark.report.table.CsvTable;
 import bedmark.survey.Bundle;
 import bedmark.wording.Telling;
 import bedmark.wording.Told;
@@ -28,6 +30,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.regex.Pattern;
 import java.util.stream.IntStream;
 import org.apache.pdfbox.Loader;
@@ -87,6 +90,35 @@ class PdfReportTest {
     void everyZoneStandsInItWithItsNumbers() throws IOException {
         check(english, new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC), "Working of ");
         check(spanish, new Wording(new Words(Reports.SPANISH), UnitSystem.US), "Cálculo de ");
+    }
+
+    /** A zone that is overloaded by its own register, and that another one would not judge so. */
+    private static ReportZone rejudged() {
+        ReportZone zone = content.at(Place.OVERLOADED).get(0);
+        Examined own = zone.examined().orElseThrow();
+        JudgedZone judged = own.judged();
+        JudgedZone today = new JudgedZone(judged.zone(), judged.copy(), judged.survey(), judged.register(),
+                content.at(Place.WITHIN).get(0).examined().orElseThrow().assessment());
+        return new ReportZone(zone.ranked(), Optional.of(new Examined(judged, Optional.of(today), own.assessor(),
+                own.form())), Optional.empty());
+    }
+
+    @Test
+    void aZoneThatTodaysRegisterJudgesOtherwiseSaysBoth() throws IOException {
+        ReportZone zone = rejudged();
+        ReportContent one = new ReportContent(Reports.AT, List.of(), List.of(zone));
+        ReportOptions options = options(Locale.ENGLISH, UnitSystem.METRIC, PaperSize.A4);
+        String page = pages(Reports.pdf(one, options)).stream().filter(text -> text.startsWith("Working of "
+                + zone.tag())).findFirst().orElseThrow();
+        assertTrue(page.contains("Latest survey: Overloaded by the register that it was made with, Within limits by "
+                + "today's."), page);
+        assertTrue(page.contains("Bed against the depth laid out: Overloaded then, Within limits by today's."), page);
+        StringBuilder csv = new StringBuilder();
+        CsvTable.write(new ReportTables(one, options).zones(), csv);
+        assertTrue(csv.toString().contains(",level,levelAtDesignFeed,levelByToday,"), csv::toString);
+        assertTrue(Pattern.compile(",overloaded,overloaded,[a-z]*,within,").matcher(csv).find(), csv::toString);
+        assertTrue(pages(english).stream().noneMatch(text -> text.contains("by the register that it was made with")),
+                "nothing is said where both agree");
     }
 
     @Test

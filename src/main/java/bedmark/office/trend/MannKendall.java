@@ -44,11 +44,17 @@ public record MannKendall(long s, double probability, boolean exact) {
             double tail = new KendallDistribution(n).atLeast(Math.abs(s));
             return new MannKendall(s, Math.min(1, 2 * tail), true);
         }
-        double z = s == 0 ? 0 : (Math.abs(s) - 1) / Math.sqrt(variance(series));
+        double z = Math.abs(z(s, variance(series)));
         return new MannKendall(s, Math.min(1, 2 * Normal.above(z)), false);
     }
 
-    private static double variance(List<TimedValue> series) {
+    /** S in its standard deviations, corrected for continuity. */
+    static double z(long s, double variance) {
+        return (s - Math.signum(s)) / Math.sqrt(variance);
+    }
+
+    /** The variance of S where there is no trend. */
+    static double variance(List<TimedValue> series) {
         double n = series.size();
         double sum = n * (n - 1) * (2 * n + 5);
         for (double value : series.stream().mapToDouble(TimedValue::value).distinct().toArray()) {

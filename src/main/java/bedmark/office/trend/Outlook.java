@@ -34,8 +34,28 @@ public sealed interface Outlook {
      *
      * @param expected by the line itself
      * @param earliest by the steeper end of the slope's interval
-     * @param latest   by the flatter end; nothing where that end never reaches the limit
+     * @param latest   by the flatter end
      */
-    record Reached(LocalDate expected, LocalDate earliest, Optional<LocalDate> latest) {
+    record Reached(When expected, When earliest, When latest) {
+    }
+
+    /** When one line meets a limit. */
+    sealed interface When {
+        /** Where the line says a day that is worth naming. */
+        default Optional<LocalDate> day() {
+            return this instanceof On on ? Optional.of(on.date) : Optional.empty();
+        }
+    }
+
+    /** On a day within the ten years after the last survey. */
+    record On(LocalDate date) implements When {
+    }
+
+    /** Later than that: a day would say no more than that it is far away. */
+    record Beyond() implements When {
+    }
+
+    /** The line does not rise. */
+    record Never() implements When {
     }
 }

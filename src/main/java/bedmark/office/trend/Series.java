@@ -64,22 +64,23 @@ public record Series(Measure measure, List<Observation> observations, Instant be
         if (limit.isEmpty() || line.slope() <= 0) {
             return Optional.empty();
         }
-        OptionalDouble expected = crossing(counted, line.slope(), limit.getAsDouble(), last);
-        OptionalDouble earliest = crossing(counted, line.upper(), limit.getAsDouble(), last);
-        OptionalDouble latest = crossing(counted, line.lower(), limit.getAsDouble(), last);
-        return expected.isEmpty() ? Optional.empty() : Optional.of(new Outlook.Reached(day(expected.getAsDouble()),
-                day(Math.min(earliest.orElse(expected.getAsDouble()), expected.getAsDouble())),
-                latest.isPresent() ? Optional.of(day(Math.max(latest.getAsDouble(), expected.getAsDouble())))
-                        : Optional.empty()));
+        double expected = crossing(counted, line.slope(), limit.getAsDouble(), last);
+        double earliest = Math.min(expected, crossing(counted, line.upper(), limit.getAsDouble(), last));
+        double latest = Math.max(expected, crossing(counted, line.lower(), limit.getAsDouble(), last));
+        return Optional.of(new Outlook.Reached(when(expected, last), when(earliest, last), when(latest, last)));
     }
 
     /** When a line through the middle of the observations meets the limit: not before the last one. */
-    private static OptionalDouble crossing(List<TimedValue> counted, double slope, double limit, double last) {
-        if (slope <= 0) {
-            return OptionalDouble.empty();
+    private static double crossing(List<TimedValue> counted, double slope, double limit, double last) {
+        return slope <= 0 ? Double.POSITIVE_INFINITY
+                : Math.max(last, (limit - TheilSen.intercept(counted, slope)) / slope);
+    }
+
+    private static Outlook.When when(double time, double last) {
+        if (time == Double.POSITIVE_INFINITY) {
+            return new Outlook.Never();
         }
-        double time = Math.max(last, (limit - TheilSen.intercept(counted, slope)) / slope);
-        return time - last > HORIZON ? OptionalDouble.empty() : OptionalDouble.of(time);
+        return time - last > HORIZON ? new Outlook.Beyond() : new Outlook.On(day(time));
     }
 
     private static LocalDate day(double days) {

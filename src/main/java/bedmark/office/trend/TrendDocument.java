@@ -2,9 +2,13 @@ package bedmark.office.trend;
 
 import bedmark.document.Branch;
 import bedmark.document.Node;
+import bedmark.engine.verdict.Level;
+import bedmark.office.FindingLine;
+import bedmark.office.JudgedZone;
 import java.math.BigDecimal;
 import java.time.Instant;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
 
@@ -13,7 +17,17 @@ public final class TrendDocument {
     private TrendDocument() {
     }
 
-    public static Branch of(ZoneTrend trend) {
+    /**
+     * A zone's trend.
+     *
+     * @param own   the latest result by the register that it was made with
+     * @param today the same by today's
+     */
+    public static Branch of(ZoneTrend trend, Optional<JudgedZone> own, Optional<JudgedZone> today) {
+        return judged(judged(of(trend), "judgedByOwnRegister", own), "judgedByTodaysRegister", today);
+    }
+
+    private static Branch of(ZoneTrend trend) {
         return Branch.EMPTY.with("format", "bedmark.trend").with("version", Node.number(1))
                 .with("plant", trend.zone().plant()).with("transfer", trend.zone().transfer())
                 .with("series", series(trend.series(), TrendDocument::series))
@@ -23,6 +37,29 @@ public final class TrendDocument {
                         .with("because", trend.interval().reason().code()), "daysFromNearToOverloaded",
                         trend.interval().pfDays()))
                 .with("clashes", Node.number(trend.clashes()));
+    }
+
+    private static Branch judged(Branch document, String key, Optional<JudgedZone> zone) {
+        return zone.map(one -> {
+            Branch judged = Branch.EMPTY.with("survey", one.copy().id().toString())
+                    .with("revision", Node.number(one.copy().revision()))
+                    .with("level", one.assessment().level().code());
+            Optional<Level> design = one.assessment().levelAtDesignFeed();
+            judged = design.isPresent() ? judged.with("levelAtDesignFeed", design.get().code()) : judged;
+            return document.with(key, judged.with("findings", series(FindingLine.of(one.assessment()),
+                    TrendDocument::finding)));
+        }).orElse(document);
+    }
+
+    private static Branch finding(FindingLine line) {
+        Branch document = Branch.EMPTY.with("code", line.rule().code()).with("unit", line.rule().unit());
+        document = line.today().isPresent() ? document.with("today", seen(line.today().get())) : document;
+        return line.atDesign().isPresent() ? document.with("atDesignFeed", seen(line.atDesign().get())) : document;
+    }
+
+    private static Branch seen(FindingLine.Seen seen) {
+        return Branch.EMPTY.with("level", seen.level().code()).with("observed", number(seen.observed()))
+                .with("standardUncertainty", number(seen.standardUncertainty()));
     }
 
     /** The unit that a measure's values carry. */
@@ -72,9 +109,14 @@ public final class TrendDocument {
     }
 
     private static Branch reached(Outlook.Reached reached) {
-        Branch branch = Branch.EMPTY.with("expected", reached.expected().toString())
-                .with("earliest", reached.earliest().toString());
-        return reached.latest().isPresent() ? branch.with("latest", reached.latest().get().toString()) : branch;
+        return end(end(end(Branch.EMPTY, "expected", reached.expected()), "earliest", reached.earliest()), "latest",
+                reached.latest());
+    }
+
+    /** A day; where there is none, why: later than ten years after the last survey, or never. */
+    private static Branch end(Branch branch, String key, Outlook.When when) {
+        return when.day().map(day -> branch.with(key, day.toString()))
+                .orElseGet(() -> branch.with(key + "Is", when instanceof Outlook.Beyond ? "beyond-ten-years" : "never"));
     }
 
     private static Branch number(Branch branch, String key, OptionalDouble value) {

@@ -1,12 +1,13 @@
 package bedmark.office.trend;
 
 import bedmark.engine.uncertainty.Estimate;
+import bedmark.engine.verdict.Level;
 import bedmark.office.JudgedZone;
 import bedmark.survey.merge.ZoneId;
 import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.OptionalDouble;
+import java.util.Optional;
 import java.util.Set;
 
 /**
@@ -45,9 +46,10 @@ public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, 
                         limits.overloaded()));
             }
         }
-        Interval interval = series.stream().filter(one -> one.measure() == Measure.DEPTH).findFirst()
-                .map(Interval::of).orElse(new Interval(Interval.MOST, Interval.Reason.TOO_FEW,
-                        OptionalDouble.empty()));
+        Optional<Level> latest = counted.stream().reduce((one, other) -> other)
+                .map(one -> one.assessment().worstLevel());
+        Interval interval = Interval.of(series.stream().filter(one -> one.measure() == Measure.DEPTH).findFirst(),
+                latest);
         return new ZoneTrend(zone, series, changes, interval, clashes);
     }
 

@@ -56,7 +56,7 @@ final class TrendChart extends Pane {
 
     private Optional<LocalDate> reached() {
         return series.outlook() instanceof Outlook.Trend trend
-                ? trend.overloaded().map(Outlook.Reached::expected) : Optional.empty();
+                ? trend.overloaded().map(Outlook.Reached::expected).flatMap(Outlook.When::day) : Optional.empty();
     }
 
     private static double days(Instant at) {

@@ -1,17 +1,29 @@
 package bedmark.office.trend;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import java.io.IOException;
+import java.net.URISyntaxException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.Random;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import org.hipparchus.distribution.continuous.NormalDistribution;
 import org.hipparchus.stat.correlation.KendallsCorrelation;
 import org.hipparchus.stat.descriptive.rank.Median;
+import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestFactory;
 
 /** The statistics against published examples and tables, against brute force, and against Hipparchus. */
 class StatisticsTest {
@@ -35,6 +47,35 @@ class StatisticsTest {
         assertEquals(-0.13, line.lower(), 1e-12);
         assertEquals(0.01, line.upper(), 1e-12);
         assertEquals(0.916, line.confidence(), 0.001);
+    }
+
+    /** Every file of {@code golden/} is a case; a new case is a new file and no code. */
+    @TestFactory
+    Stream<DynamicTest> everyFileHolds() throws IOException, URISyntaxException {
+        Path folder = Path.of(Objects.requireNonNull(StatisticsTest.class.getResource("golden")).toURI());
+        try (Stream<Path> files = Files.list(folder)) {
+            List<Path> cases = files.sorted().toList();
+            assertFalse(cases.isEmpty(), "golden files");
+            return cases.stream().map(file -> DynamicTest.dynamicTest(file.getFileName().toString(), () ->
+                    check(new ObjectMapper().readTree(file.toFile()))));
+        }
+    }
+
+    private static void check(JsonNode golden) {
+        assertTrue(golden.path("source").asText().length() > 10, "a source that can be found again");
+        List<Double> values = new ArrayList<>();
+        golden.path("values").forEach(value -> values.add(value.asDouble()));
+        List<TimedValue> series = series(values.stream().mapToDouble(Double::doubleValue).toArray());
+        MannKendall test = MannKendall.of(series);
+        double variance = MannKendall.variance(series);
+        Map<String, Double> results = Map.of("S", (double) test.s(), "varianceOfS", variance, "Z",
+                MannKendall.z(test.s(), variance), "probability", test.probability());
+        assertFalse(golden.path("expect").isEmpty(), "something that is expected");
+        golden.path("expect").forEach(row -> {
+            double value = row.path("value").asDouble();
+            assertEquals(value, results.get(row.path("result").asText()), row.path("tolerance").asDouble()
+                    * Math.abs(value), row.path("result").asText());
+        });
     }
 
     /** Upper tails of Kendall's S as the tables of Kendall and of Hollander and Wolfe print them (recalled). */

@@ -7,6 +7,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.office.JudgedZone;
+import bedmark.quantity.UnitSystem;
+import bedmark.report.TrendTelling;
 import bedmark.survey.Assessor;
 import bedmark.survey.InspectionStatus;
 import bedmark.survey.Plants;
@@ -15,12 +17,17 @@ import bedmark.survey.Survey;
 import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Origin;
 import bedmark.survey.merge.ZoneId;
+import bedmark.wording.Wording;
+import bedmark.words.Words;
 import java.math.BigDecimal;
+import java.time.Instant;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.OptionalLong;
 import java.util.UUID;
 import java.util.stream.Stream;
@@ -71,10 +78,10 @@ class ZoneTrendTest {
         assertEquals(0.01 / 30.4, outlook.line().slope(), 2e-5);
         // 170 mm on 1 August, 10 mm a month: 220 mm in January, 250 mm in April.
         Outlook.Reached overloaded = outlook.overloaded().orElseThrow();
-        assertTrue(Math.abs(overloaded.expected().toEpochDay() - LocalDate.of(2026, 4, 1).toEpochDay()) < 10);
-        assertTrue(!overloaded.earliest().isAfter(overloaded.expected()));
-        assertTrue(!overloaded.latest().orElseThrow().isBefore(overloaded.expected()));
-        assertTrue(outlook.near().orElseThrow().expected().isBefore(overloaded.expected()));
+        assertTrue(Math.abs(day(overloaded.expected()).toEpochDay() - LocalDate.of(2026, 4, 1).toEpochDay()) < 10);
+        assertTrue(!day(overloaded.earliest()).isAfter(day(overloaded.expected())));
+        assertTrue(!day(overloaded.latest()).isBefore(day(overloaded.expected())));
+        assertTrue(day(outlook.near().orElseThrow().expected()).isBefore(day(overloaded.expected())));
         assertEquals(Interval.Reason.HALF_OF_PF, trend.interval().reason());
         assertEquals(0.03 / outlook.line().upper(), trend.interval().pfDays().getAsDouble(), 1e-9);
         assertEquals((int) (trend.interval().pfDays().getAsDouble() / 2), trend.interval().days());
@@ -86,6 +93,80 @@ class ZoneTrendTest {
         assertEquals(new Outlook.TooFew(4, 5), depth(trend).outlook());
         assertEquals(Interval.Reason.TOO_FEW, trend.interval().reason());
         assertEquals(Interval.MOST, trend.interval().days());
+    }
+
+    private static LocalDate day(Outlook.When when) {
+        return when.day().orElseThrow();
+    }
+
+    private static Outlook.Reached overloaded(double... depths) {
+        List<Observation> observations = new ArrayList<>();
+        for (double depth : depths) {
+            observations.add(new Observation(LocalDate.of(2020 + observations.size(), 1, 1)
+                    .atStartOfDay(ZoneOffset.UTC).toInstant(), depth, 0, new UUID(0, observations.size()), 1, false));
+        }
+        return assertInstanceOf(Outlook.Trend.class, Series.of(Measure.DEPTH, observations, Instant.EPOCH,
+                OptionalDouble.empty(), OptionalDouble.of(0.19)).outlook()).overloaded().orElseThrow();
+    }
+
+    @Test
+    void eachEndSaysThatItLiesBeyondTenYearsOrIsNever() {
+        Outlook.Reached late = overloaded(0.1, 0.101, 0.108, 0.109, 0.125, 0.126, 0.127);
+        assertInstanceOf(Outlook.On.class, late.earliest(), "an early end that is near is not kept back");
+        assertInstanceOf(Outlook.Beyond.class, late.expected());
+        assertInstanceOf(Outlook.Beyond.class, late.latest(), "beyond ten years, and not without an end");
+        assertInstanceOf(Outlook.Beyond.class, overloaded(0.1, 0.101, 0.102, 0.103, 0.104, 0.105).earliest());
+    }
+
+    @Test
+    void theEndsOfADateStandInTheDocumentAndInWords() {
+        Series series = new Series(Measure.DEPTH, List.of(), Instant.EPOCH, OptionalDouble.of(0.22),
+                OptionalDouble.of(0.25), new Outlook.Trend(TheilSen.of(rise(), 0.95), MannKendall.of(rise()),
+                Optional.of(new Outlook.Reached(new Outlook.On(LocalDate.of(2027, 1, 2)), new Outlook.On(
+                LocalDate.of(2026, 1, 2)), new Outlook.Never())), Optional.of(new Outlook.Reached(
+                new Outlook.Beyond(), new Outlook.On(LocalDate.of(2027, 5, 6)), new Outlook.Beyond()))));
+        ZoneTrend trend = new ZoneTrend(ZONE, List.of(series), List.of(), new Interval(7, Interval.Reason.OVERLOADED,
+                OptionalDouble.empty()), 0);
+        Branch outlook = TrendDocument.of(trend, Optional.empty(), Optional.empty()).branches("series").get(0).branch("outlook").orElseThrow();
+        assertEquals(Plants.read("{'expected':'2027-01-02','earliest':'2026-01-02','latestIs':'never'}"),
+                outlook.branch("nearReached").orElseThrow());
+        assertEquals(Plants.read("{'expectedIs':'beyond-ten-years','earliest':'2027-05-06',"
+                + "'latestIs':'beyond-ten-years'}"), outlook.branch("overloadedReached").orElseThrow());
+        String told = String.join("\n", new TrendTelling(new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC))
+                .lines(trend, Optional.empty(), Optional.empty()));
+        assertTrue(told.contains("near limit: 220") && told.contains("limit of overload: 250"), told);
+        assertTrue(told.contains("about 2027-01-02, at the earliest 2026-01-02, at the latest never."), told);
+        assertTrue(told.contains("Overloaded most likely beyond ten years, at the earliest 2027-05-06, at the latest "
+                + "beyond ten years."), told);
+    }
+
+    private static List<TimedValue> rise() {
+        return Stream.of(1, 2, 3, 4, 5).map(day -> new TimedValue(day, day)).toList();
+    }
+
+    private static Interval interval(int... depthsMm) {
+        List<JudgedZone> zones = new ArrayList<>();
+        for (int depth : depthsMm) {
+            zones.add(survey(LocalDate.of(2025, 1, 1).plusMonths(zones.size()), depth, ""));
+        }
+        return ZoneTrend.of(ZONE, zones, List.of(), 0).interval();
+    }
+
+    @Test
+    void aZoneThatIsOverloadedIsLookedAtMostOften() {
+        Interval shortest = new Interval(Interval.LEAST, Interval.Reason.OVERLOADED, OptionalDouble.empty());
+        assertEquals(shortest, interval(280), "one survey is enough to say so");
+        assertEquals(shortest, interval(280, 281, 279, 280, 282, 278), "with no trend as well");
+        assertEquals(shortest, interval(340, 330, 320, 310, 300, 290), "even where it falls");
+        assertEquals(Interval.Reason.OVERLOADED, interval(230, 240, 250, 260, 270, 280).reason());
+        assertEquals(Interval.Reason.TOO_FEW, interval(280, 150).reason(), "but not where it was mended");
+    }
+
+    @Test
+    void aZoneThatIsNearALimitDoesNotWaitAsLongAsSitesGo() {
+        Interval half = new Interval(91, Interval.Reason.NEAR_A_LIMIT, OptionalDouble.empty());
+        assertEquals(half, interval(230));
+        assertEquals(half, interval(230, 229, 231, 230, 228, 232));
     }
 
     @Test

@@ -59,6 +59,7 @@ public final class OfficeShell {
     public OfficeShell(OfficeDesk desk, double width, double height) {
         this.desk = desk;
         this.receive = new ReceiveModel(desk);
+        receive.lookBack();
         this.worst = new WorstModel(desk);
         this.scene = new Scene(root, width, height);
         root.getStyleClass().add("office");

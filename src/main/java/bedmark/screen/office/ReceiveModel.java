@@ -5,8 +5,12 @@ import bedmark.document.Refused;
 import bedmark.journal.Progress;
 import bedmark.office.PackFolder;
 import bedmark.office.Received;
+import bedmark.survey.Act;
+import bedmark.survey.Entry;
+import bedmark.survey.OfficeDeed;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -21,9 +25,11 @@ import javafx.collections.ObservableList;
 /** Takes packs in that are dropped, chosen or put into a watched folder, and tells what came of each. */
 public final class ReceiveModel {
     private static final int LOOK_EVERY_SECONDS = 2;
+    private static final int EARLIER_SHOWN = 200;
 
     private final OfficeDesk desk;
     private final ObservableList<Received> received = FXCollections.observableArrayList();
+    private final ReadOnlyObjectWrapper<List<Earlier>> earlier = new ReadOnlyObjectWrapper<>(List.of());
     private final ReadOnlyObjectWrapper<Optional<Path>> watched = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ScheduledExecutorService watch = Executors.newSingleThreadScheduledExecutor(run -> {
         Thread thread = new Thread(run, "office-watch");
@@ -32,11 +38,19 @@ public final class ReceiveModel {
     });
     private volatile Optional<PackFolder> folder = Optional.empty();
 
+    /**
+     * A pack that was received before this window was opened.
+     *
+     * @param device the tablet's name; its key where it has none
+     */
+    public record Earlier(String file, String device, OffsetDateTime at) {
+    }
+
     /** What came of packs, and why the first receipt could not be written that was not. */
     private record Came(List<Received> packs, Optional<Defect> unwritten) {
     }
 
-    /** A model at a desk; packs that came before it are not told of. */
+    /** A model at a desk; what came before it is told apart from what comes now. */
     public ReceiveModel(OfficeDesk desk) {
         this.desk = desk;
         watch.scheduleWithFixedDelay(this::look, LOOK_EVERY_SECONDS, LOOK_EVERY_SECONDS, TimeUnit.SECONDS);
@@ -45,6 +59,28 @@ public final class ReceiveModel {
     /** What came, the newest first. */
     public ObservableList<Received> received() {
         return received;
+    }
+
+    /** What came before, the newest first; not more of it than anybody looks through. */
+    public ReadOnlyObjectProperty<List<Earlier>> earlierProperty() {
+        return earlier.getReadOnlyProperty();
+    }
+
+    /** Looks up what came before. */
+    void lookBack() {
+        desk.ask(progress -> earlier(desk.store().packs()), earlier::set);
+    }
+
+    private static List<Earlier> earlier(List<Entry> packs) {
+        List<Earlier> found = new ArrayList<>();
+        for (Entry entry : packs.subList(Math.max(0, packs.size() - EARLIER_SHOWN), packs.size())) {
+            if (entry.act() instanceof Act.OfficeActed acted
+                    && acted.deed() instanceof OfficeDeed.PackReceived pack) {
+                found.add(0, new Earlier(pack.file(), pack.deviceName().isBlank() ? pack.fingerprint()
+                        : pack.deviceName(), entry.at()));
+            }
+        }
+        return List.copyOf(found);
     }
 
     public ReadOnlyObjectProperty<Optional<Path>> watchedProperty() {

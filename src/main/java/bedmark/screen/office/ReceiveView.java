@@ -3,6 +3,7 @@ package bedmark.screen.office;
 import bedmark.office.Received;
 import bedmark.screen.Listening;
 import bedmark.screen.part.ActionButton;
+import bedmark.screen.part.Plate;
 import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
@@ -11,11 +12,13 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import javafx.collections.ListChangeListener;
+import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.input.TransferMode;
 import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
@@ -37,7 +40,7 @@ final class ReceiveView extends VBox {
         ListChangeListener<Received> shown = change -> show();
         model.received().addListener(shown);
         listening.onEnd(() -> model.received().removeListener(shown));
-        show();
+        listening.to(model.earlierProperty(), earlier -> show());
     }
 
     private Node dropPlace(OfficeDesk desk, Listening listening) {
@@ -90,5 +93,25 @@ final class ReceiveView extends VBox {
             none.getStyleClass().add("soft");
             rows.getChildren().add(none);
         }
+        List<ReceiveModel.Earlier> earlier = model.earlierProperty().get();
+        if (!earlier.isEmpty()) {
+            Label title = new Label(wording.text("office.receive.earlier"));
+            title.getStyleClass().add("section-title");
+            rows.getChildren().add(title);
+            earlier.forEach(one -> rows.getChildren().add(row(one)));
+        }
+    }
+
+    private Node row(ReceiveModel.Earlier earlier) {
+        Label file = Texts.wrapped(earlier.file());
+        file.getStyleClass().add("zone-name");
+        VBox words = new VBox(file, Texts.wrapped(wording.text("office.receive.earlier-from", earlier.device(),
+                wording.moment(earlier.at()))));
+        words.setMinWidth(0);
+        HBox.setHgrow(words, Priority.ALWAYS);
+        HBox row = new HBox(new Plate(Plate.Tone.FAINT, wording.text("office.receive.received")), words);
+        row.getStyleClass().add("received-row");
+        row.setAlignment(Pos.CENTER_LEFT);
+        return row;
     }
 }

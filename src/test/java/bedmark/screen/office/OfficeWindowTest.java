@@ -103,6 +103,8 @@ class OfficeWindowTest {
             window.click("found-seen");
             assertFalse(window.node("found-seen").getParent().isVisible());
             assertEquals(3, window.desk().store().packs().size());
+            window.click("room-receive");
+            assertTrue(window.words().contains("round-under-way.zip\nFrom Tablet 3, received "), window.words());
         }
     }
 

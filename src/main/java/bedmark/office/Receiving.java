@@ -97,6 +97,7 @@ final class Receiving {
             for (String key : List.of("id", "createdAt", "device")) {
                 head = document.has(key) ? head.with(key, document.get(key).get()) : head;
             }
+            Ids.prove(pack.bundle().register(), pack.bundle().surveys());
             Intake intake = Intake.of(pack.bundle(), laid.get().sha256());
             return Proved.sound(new Sound(file, new Books.Pack(laid.get(), intake), pack.fingerprint().text(), head));
         } catch (Refused e) {

@@ -6,6 +6,7 @@ import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.journal.Digest;
 import bedmark.json.Canonical;
+import bedmark.office.Ids;
 import bedmark.office.OfficeStore;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Register;
@@ -44,7 +45,8 @@ public final class RegisterDesk {
      * Takes a draft over.
      *
      * @throws Refused {@code draft-unsound} where it has defects, {@code register-changed-since} where the register is
-     *                 no longer what the draft was made from; whatever makes a register impossible
+     *                 no longer what the draft was made from, {@code id-too-long}, {@code id-control-character};
+     *                 whatever makes a register impossible
      */
     public void take(Draft draft, String why, String person) {
         if (!draft.sound()) {
@@ -63,7 +65,9 @@ public final class RegisterDesk {
             throw new Refused(Defect.in("", "person-absent"));
         }
         Branch plant = head.branch("plant").orElse(Branch.EMPTY);
-        String id = new Register(plant).document().text("id").orElse("");
+        Register register = new Register(plant);
+        Ids.prove(register, List.of());
+        String id = register.document().text("id").orElse("");
         if (!store.head(id).equals(Optional.of(head))) {
             store.act(person, new OfficeDeed.RegisterChanged(id, head, why), base);
         }

@@ -3,6 +3,7 @@ package bedmark.screen.office;
 import bedmark.office.PlantEnergy;
 import bedmark.office.RankQuery;
 import bedmark.office.RankedZone;
+import bedmark.screen.Listening;
 import java.util.List;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.SimpleBooleanProperty;
@@ -15,8 +16,13 @@ public final class EnergyModel {
     private final BooleanProperty byArea = new SimpleBooleanProperty();
     private List<RankedZone> zones = List.of();
 
-    EnergyModel(OfficeDesk desk) {
+    /** @param listening asks the store anew whenever something was received or decided */
+    EnergyModel(OfficeDesk desk, Listening listening) {
         byArea.addListener((property, before, now) -> show());
+        listening.to(desk.changesProperty(), changes -> look(desk));
+    }
+
+    private void look(OfficeDesk desk) {
         desk.ask(progress -> List.copyOf(desk.store().rank(RankQuery.ALL, progress)), ranked -> {
             zones = ranked;
             show();
@@ -24,7 +30,10 @@ public final class EnergyModel {
     }
 
     private void show() {
-        bars.setAll(byArea.get() ? PlantEnergy.byArea(zones) : PlantEnergy.byConveyor(zones));
+        List<PlantEnergy.Bar> now = byArea.get() ? PlantEnergy.byArea(zones) : PlantEnergy.byConveyor(zones);
+        if (!bars.equals(now)) {
+            bars.setAll(now);
+        }
     }
 
     public ObservableList<PlantEnergy.Bar> bars() {

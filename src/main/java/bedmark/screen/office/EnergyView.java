@@ -1,11 +1,15 @@
 package bedmark.screen.office;
 
 import bedmark.office.PlantEnergy.Bar;
+import bedmark.office.RankedZone;
+import bedmark.office.Saving;
 import bedmark.screen.Listening;
 import bedmark.screen.part.Texts;
 import bedmark.wording.Wording;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
 import javafx.collections.ListChangeListener;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
@@ -96,12 +100,25 @@ final class EnergyView extends VBox {
         if (bar.co2().isPresent()) {
             words.add(wording.text("office.energy.co2", wording.format().computed(bar.co2().getAsDouble() / 1000, 1)));
         }
-        bar.best().ifPresent(zone -> words.add(wording.text("office.energy.best", mwh(bar.savedWh()),
-                zone.names().tag())));
+        bar.best().ifPresent(zone -> words.add(best(bar, zone)));
         if (bar.lacking() > 0) {
             words.add(wording.text("office.energy.lacking", bar.lacking()));
         }
         return Texts.wrapped(String.join(" · ", words));
+    }
+
+    /** What the remedies save together, and which one at which zone saves most of it. */
+    private String best(Bar bar, RankedZone zone) {
+        Saving saving = zone.saving().orElseThrow();
+        return wording.text("office.energy.best", saved(bar.savedWh(), bar.savedCost(), bar.currency()),
+                zone.names().tag(), wording.text("office.energy.remedy." + saving.remedy()),
+                saved(saving.wh(), saving.cost(), zone.currency()));
+    }
+
+    private String saved(double wh, OptionalDouble cost, Optional<String> currency) {
+        return cost.isPresent() && currency.isPresent() ? wording.text("office.energy.saved-money", mwh(wh),
+                wording.format().computed(cost.getAsDouble(), 0), currency.get())
+                : wording.text("office.energy.saved", mwh(wh));
     }
 
     /** The bar itself: as wide as its share of the greatest, the part that can be saved at its end. */

@@ -89,7 +89,7 @@ public final class OfficeShell {
         show(switch (next) {
             case WORST -> new WorstView(desk, worst, begin(), this::zone);
             case RECEIVE -> new ReceiveView(desk, receive, begin());
-            case ENERGY -> new EnergyView(desk, new EnergyModel(desk), begin());
+            case ENERGY -> energy(begin());
             case REGISTER -> new RegisterView(desk, register(), begin());
             case REPORT -> new ReportView(desk, new ReportModel(desk), begin());
         });
@@ -101,6 +101,10 @@ public final class OfficeShell {
             register = new RegisterModel(desk);
         }
         return register;
+    }
+
+    private EnergyView energy(Listening now) {
+        return new EnergyView(desk, new EnergyModel(desk, now), now);
     }
 
     /** Opens one zone. */

@@ -87,6 +87,15 @@ class OfficeWindowTest {
             Files.copy(packs.resolve("round-2026-03.zip"), inbox.resolve("a.zip"));
             window.until(() -> window.words().contains("25 new surveys"));
             assertEquals(1, window.desk().store().packs().size());
+            window.click("room-energy");
+            window.until(() -> window.words().contains("; most at "));
+            assertTrue(window.words().matches("(?s).*remedies save [^;]* MWh \\([^;]* EUR\\); most at TP-[0-9]+: "
+                    + "(free the bed|set the boards wider|lower the feed|renew the worn seals), .* MWh .*"),
+                    window.words());
+            String before = window.words();
+            Files.copy(packs.resolve("round-under-way.zip"), inbox.resolve("b.zip"));
+            window.until(() -> !window.words().equals(before));
+            assertEquals(2, window.desk().store().packs().size());
         }
     }
 

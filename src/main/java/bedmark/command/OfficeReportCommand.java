@@ -71,7 +71,8 @@ final class OfficeReportCommand implements Callable<Integer> {
         ReportFile.Kind kind = ReportFile.Kind.of(out).orElseThrow(() ->
                 bad("--out is a file .pdf, .xlsx or .csv, not '" + out + "'"));
         Words words = language.map(this::words).orElse(surroundings.words());
-        UnitSystem system = UnitSystem.ofCode(units).orElseThrow(() -> bad("--units is metric or us, not '" + units + "'"));
+        UnitSystem system = UnitSystem.ofCode(units).orElseThrow(() ->
+                bad("--units is metric or us, not '" + units + "'"));
         PaperSize size = PaperSize.ofCode(paper).orElseThrow(() -> bad("--paper is a4 or letter, not '" + paper + "'"));
         if (staleAfter < 1) {
             throw bad("--stale-after is a number of days from 1 on");

@@ -12,8 +12,8 @@ import java.util.stream.Stream;
 
 /**
  * Ids as far as the tables keep them as texts or keys. Every database that an office may use takes what these bounds
- * let through, so that a pack fares alike in all of them. Only what comes in anew is asked: what an earlier program took
- * in stays.
+ * let through, so that a pack fares alike in all of them. Only what comes in anew is asked: what an earlier program
+ * took in stays.
  */
 public final class Ids {
     /** In characters; no index holds a key of any length, and a zone's is made of two ids. */

@@ -85,7 +85,8 @@ public record ReportContent(OffsetDateTime madeAt, List<String> plants, List<Rep
         }
 
         private Examined examined(JudgedZone judged, RankedZone ranked) {
-            return new Examined(judged, store.judgedToday(ranked.zone()), assessors.computeIfAbsent(judged.register(), Assessor::new),
+            return new Examined(judged, store.judgedToday(ranked.zone()),
+                    assessors.computeIfAbsent(judged.register(), Assessor::new),
                     form(judged.survey(), ranked.zone().plant()));
         }
 

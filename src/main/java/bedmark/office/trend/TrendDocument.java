@@ -115,8 +115,8 @@ public final class TrendDocument {
 
     /** A day; where there is none, why: later than ten years after the last survey, or never. */
     private static Branch end(Branch branch, String key, Outlook.When when) {
-        return when.day().map(day -> branch.with(key, day.toString()))
-                .orElseGet(() -> branch.with(key + "Is", when instanceof Outlook.Beyond ? "beyond-ten-years" : "never"));
+        return when.day().map(day -> branch.with(key, day.toString())).orElseGet(() ->
+                branch.with(key + "Is", when instanceof Outlook.Beyond ? "beyond-ten-years" : "never"));
     }
 
     private static Branch number(Branch branch, String key, OptionalDouble value) {

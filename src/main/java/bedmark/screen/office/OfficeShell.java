@@ -14,6 +14,7 @@ import bedmark.screen.theme.Theme;
 import bedmark.survey.merge.ZoneId;
 import bedmark.wording.Wording;
 import java.util.Locale;
+import java.util.Optional;
 import javafx.application.Platform;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
@@ -53,6 +54,7 @@ public final class OfficeShell {
     private final WorstModel worst;
     private RegisterModel register;
     private Room room = Room.WORST;
+    private Optional<ZoneStoryModel> story = Optional.empty();
     private Listening shown = new Listening();
 
     /** A window of that size; the worst zones are shown first. */
@@ -67,7 +69,7 @@ public final class OfficeShell {
         desk.preferencesProperty().addListener((property, before, now) -> {
             if (!before.withPerson("").equals(now.withPerson(""))) {
                 dress();
-                open(room);
+                again();
             }
         });
         open(Room.WORST);
@@ -86,6 +88,7 @@ public final class OfficeShell {
     /** Opens a room. */
     public void open(Room next) {
         room = next;
+        story = Optional.empty();
         show(switch (next) {
             case WORST -> new WorstView(desk, worst, begin(), this::zone);
             case RECEIVE -> new ReceiveView(desk, receive, begin());
@@ -110,7 +113,17 @@ public final class OfficeShell {
     /** Opens one zone. */
     public void zone(ZoneId zone) {
         room = Room.WORST;
-        show(new ZoneStoryView(desk, new ZoneStoryModel(desk, zone), begin(), () -> open(Room.WORST)));
+        story = Optional.of(new ZoneStoryModel(desk, zone));
+        show(story.get());
+    }
+
+    private void show(ZoneStoryModel model) {
+        show(new ZoneStoryView(desk, model, begin(), () -> open(Room.WORST)));
+    }
+
+    /** The same in other words or another light; what is typed for a zone stays with it. */
+    private void again() {
+        story.ifPresentOrElse(this::show, () -> open(room));
     }
 
     private Listening begin() {

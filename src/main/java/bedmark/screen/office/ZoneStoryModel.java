@@ -15,12 +15,27 @@ import java.util.List;
 import java.util.Optional;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
 
 /** One loading zone: how it stands, how it came there, and what the office does about it. */
 public final class ZoneStoryModel {
     private final OfficeDesk desk;
     private final ZoneId zone;
     private final ReadOnlyObjectWrapper<Optional<Story>> story = new ReadOnlyObjectWrapper<>(Optional.empty());
+
+    private final Draft draft = new Draft();
+
+    /** What is typed and not yet sent; it stays while the screen is made anew in other words or another light. */
+    static final class Draft {
+        final StringProperty reason = new SimpleStringProperty("");
+        final StringProperty until = new SimpleStringProperty("");
+        final StringProperty action = new SimpleStringProperty("");
+        final StringProperty owner = new SimpleStringProperty("");
+        final StringProperty due = new SimpleStringProperty("");
+        final StringProperty order = new SimpleStringProperty("");
+        final StringProperty clashReason = new SimpleStringProperty("");
+    }
 
     /**
      * Everything that the screen shows.
@@ -64,6 +79,10 @@ public final class ZoneStoryModel {
 
     public ReadOnlyObjectProperty<Optional<Story>> storyProperty() {
         return story.getReadOnlyProperty();
+    }
+
+    Draft draft() {
+        return draft;
     }
 
     /** Accepts or shelves a finding. */

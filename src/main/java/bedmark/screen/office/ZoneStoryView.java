@@ -17,7 +17,6 @@ import bedmark.screen.theme.LevelGlyph;
 import bedmark.survey.OfficeDeed;
 import bedmark.wording.Wording;
 import java.util.Optional;
-import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
@@ -44,7 +43,6 @@ final class ZoneStoryView extends ScrollPane {
     private final TextField actionText;
     private final TextField actionOwner;
     private final TextField actionOrder;
-    private final StringProperty due = new SimpleStringProperty("");
     private final DayField actionDue;
     private final TextField clashReason;
     private Measure measure = Measure.DEPTH;
@@ -58,12 +56,13 @@ final class ZoneStoryView extends ScrollPane {
         setContent(content);
         setFitToWidth(true);
         reason.setId("reason");
-        until = new DayField(wording, "until", wording.text("office.story.until"), new SimpleStringProperty(""));
-        actionText = field("action-text", "office.story.what");
-        actionOwner = field("action-owner", "office.story.owner");
-        actionOrder = field("action-order", "office.story.order");
-        actionDue = new DayField(wording, "action-due", wording.text("office.story.due"), due);
-        clashReason = field("clash-reason", "office.story.reason");
+        reason.textProperty().bindBidirectional(model.draft().reason);
+        until = new DayField(wording, "until", wording.text("office.story.until"), model.draft().until);
+        actionText = field("action-text", "office.story.what", model.draft().action);
+        actionOwner = field("action-owner", "office.story.owner", model.draft().owner);
+        actionOrder = field("action-order", "office.story.order", model.draft().order);
+        actionDue = new DayField(wording, "action-due", wording.text("office.story.due"), model.draft().due);
+        clashReason = field("clash-reason", "office.story.reason", model.draft().clashReason);
         listening.to(model.storyProperty(), story -> show());
     }
 
@@ -233,13 +232,14 @@ final class ZoneStoryView extends ScrollPane {
     private void added() {
         actionText.clear();
         actionOwner.clear();
-        due.set("");
+        model.draft().due.set("");
         actionOrder.clear();
     }
 
-    private TextField field(String id, String key) {
+    private TextField field(String id, String key, StringProperty text) {
         TextField field = new TextField();
         field.setId(id);
+        field.textProperty().bindBidirectional(text);
         field.setPromptText(wording.text(key));
         field.setAccessibleText(wording.text(key));
         return field;

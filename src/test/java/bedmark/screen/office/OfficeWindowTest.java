@@ -196,6 +196,15 @@ class OfficeWindowTest {
             window.click("accept-" + worst.findings().get(0).rule().code());
             assertTrue(window.words().contains("Accepted by Ida Marsh"), window.words());
             assertEquals("Set the boards wider", ((TextField) window.node("action-text")).getText());
+            window.click("reason");
+            window.type("again");
+            window.click("language");
+            window.until(() -> window.words().contains("Añadir acción"));
+            window.click("light");
+            assertTrue(((TextField) window.node("reason")).getText().endsWith("again"));
+            window.click("language");
+            window.until(() -> window.words().contains("Add action"));
+            assertEquals("Set the boards wider", ((TextField) window.node("action-text")).getText());
             assertEquals("2027-01-31", ((TextField) window.node("action-due")).getText());
             window.click("action-add");
             assertTrue(window.words().contains("due 31 Jan 2027"), window.words());

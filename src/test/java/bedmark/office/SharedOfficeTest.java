@@ -6,8 +6,14 @@ import static org.junit.jupiter.api.Assertions.assertNotNull;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
+import bedmark.document.Branch;
+import bedmark.document.Refused;
 import bedmark.journal.Digest;
 import bedmark.journal.Progress;
+import bedmark.office.register.Draft;
+import bedmark.office.register.RegisterChange;
+import bedmark.office.register.RegisterDesk;
+import bedmark.office.register.RegisterImport;
 import bedmark.quantity.UnitSystem;
 import bedmark.report.ReportContent;
 import bedmark.report.ReportFile;
@@ -24,13 +30,16 @@ import java.util.Collections;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Random;
 import java.util.Set;
 import java.util.TreeMap;
 import java.util.concurrent.CountDownLatch;
+import java.util.concurrent.CyclicBarrier;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
+import java.util.concurrent.TimeUnit;
 import java.util.stream.Stream;
 import java.util.zip.ZipEntry;
 import java.util.zip.ZipFile;
@@ -44,6 +53,8 @@ import org.junit.jupiter.api.io.TempDir;
 @Tag("outside-tool")
 class SharedOfficeTest {
     private static final int DESKS = 8;
+    /** Whoever is refused before the others are ready must not keep them waiting for ever. */
+    private static final int PATIENCE_SECONDS = 60;
     private static PostgresServer server;
 
     @TempDir
@@ -105,6 +116,41 @@ class SharedOfficeTest {
             new OfficeExport(shared).write(folder.resolve("export-shared"), Progress.NONE);
             assertEquals(files(folder.resolve("export-alone")), files(folder.resolve("export-shared")));
             assertEquals(report(alone, folder.resolve("report-alone")), report(shared, folder.resolve("report-shared")));
+            desksThatChangeOneRegisterDoNotReplaceEachOther(shared);
+        }
+    }
+
+    /** Of as many desks as begin from the same register one changes it; the others are told, and lose nothing. */
+    private void desksThatChangeOneRegisterDoNotReplaceEachOther(OfficeStore shared) throws Exception {
+        String plant = shared.registers().keySet().iterator().next();
+        Branch before = shared.head(plant).orElseThrow();
+        CyclicBarrier together = new CyclicBarrier(DESKS);
+        ExecutorService desks = Executors.newFixedThreadPool(DESKS);
+        List<Future<Optional<String>>> work = new ArrayList<>();
+        for (int i = 1; i <= DESKS; i++) {
+            int number = i;
+            work.add(desks.submit(() -> change(number, before, together)));
+        }
+        List<String> refused = new ArrayList<>();
+        for (Future<Optional<String>> one : work) {
+            one.get().ifPresent(refused::add);
+        }
+        desks.shutdown();
+        assertEquals(Collections.nCopies(DESKS - 1, "register-changed-since"), refused);
+        assertEquals(before.branch("plant").orElseThrow().branches("materials").size() + 1,
+                shared.registers().get(plant).materials().size());
+    }
+
+    /** Adds a material of a desk's own; why it was refused, where it was. */
+    private Optional<String> change(int number, Branch before, CyclicBarrier together) throws Exception {
+        try (OfficeStore store = desk(number)) {
+            Draft draft = RegisterImport.changed(before, new RegisterChange("materials", Optional.empty(),
+                    Map.of("id", "of-desk-" + number)));
+            together.await(PATIENCE_SECONDS, TimeUnit.SECONDS);
+            new RegisterDesk(store).take(draft, "edit", "Desk " + number);
+            return Optional.empty();
+        } catch (Refused e) {
+            return Optional.of(e.defect().code());
         }
     }
 

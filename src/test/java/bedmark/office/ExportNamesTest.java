@@ -1,15 +1,20 @@
 package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import bedmark.document.Branch;
+import bedmark.journal.Progress;
 import bedmark.office.register.Table;
 import bedmark.office.register.Tables;
+import bedmark.survey.Bundle;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -23,6 +28,23 @@ class ExportNamesTest {
         assertTrue(("plant=" + OfficeExport.folderName(longId)).length() <= 255);
         assertNotEquals(OfficeExport.folderName(longId + "a"), OfficeExport.folderName(longId + "b"));
         assertTrue(!OfficeExport.folderName("~").contains("~"), "a short id can't look like a cut one");
+    }
+
+    @Test
+    void aPlantWithALongIdIsExportedWhole(@TempDir Path folder) throws IOException {
+        String id = "ñ".repeat(200);
+        Branch document = Offices.sample("round-2026-03").document();
+        Bundle bundle = new Bundle(document.with("plant", document.branch("plant").orElseThrow().with("id", id)));
+        Path pack = Offices.pack(bundle, folder.resolve("tablet"), folder.resolve("packs/a.zip"));
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), folder.resolve("tablet"))) {
+            assertInstanceOf(Received.Taken.class, store.receive(pack, "Ida Marsh"));
+            new OfficeExport(store).write(folder.resolve("out"), Progress.NONE);
+        }
+        try (Stream<Path> files = Files.walk(folder.resolve("out/json"))) {
+            List<Path> surveys = files.filter(file -> file.endsWith("surveys.jsonl")).toList();
+            assertEquals(1, surveys.size());
+            assertEquals(document.branches("surveys").size(), Files.readAllLines(surveys.get(0)).size());
+        }
     }
 
     @Test

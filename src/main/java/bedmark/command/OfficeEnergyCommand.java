@@ -78,8 +78,8 @@ final class OfficeEnergyCommand implements Callable<Integer> {
         int length = most > 0 ? (int) Math.round(WIDTH * bar.wh() / most) : 0;
         surroundings.out().println(Wording.plain(wording.text("office.energy.line",
                 "#".repeat(length) + " ".repeat(WIDTH - length), bar.name(), where(bar, plants),
-                known(bar) ? wording.format().computed(bar.wh() / 1e6, 1) : "-",
-                known(bar) ? wording.format().computed(bar.savedWh() / 1e6, 1) : "-",
+                bar.known() ? wording.format().computed(bar.wh() / 1e6, 1) : "-",
+                bar.known() ? wording.format().computed(bar.savedWh() / 1e6, 1) : "-",
                 bar.cost().isPresent() ? wording.format().computed(bar.cost().getAsDouble(), 0) + " "
                         + bar.currency().orElse("") : "-",
                 bar.co2().isPresent() ? wording.format().computed(bar.co2().getAsDouble() / 1000, 1) : "-"))
@@ -92,13 +92,8 @@ final class OfficeEnergyCommand implements Callable<Integer> {
                 .collect(Collectors.joining(", "));
     }
 
-    /** Whether any zone has a figure: without one the sum is not nothing, but unknown. */
-    private static boolean known(PlantEnergy.Bar bar) {
-        return bar.zones() > 0;
-    }
-
     private static List<String> cells(PlantEnergy.Bar bar) {
-        boolean known = known(bar);
+        boolean known = bar.known();
         return List.of(bar.plant(), bar.area(), bar.name(), known ? plain(bar.wh()) : "",
                 !known ? "" : bar.shaft() ? "shaft" : "electrical",
                 number(bar.cost()), bar.currency().orElse(""), number(bar.co2()), known ? plain(bar.savedWh()) : "",

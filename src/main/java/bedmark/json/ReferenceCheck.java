@@ -136,8 +136,7 @@ final class ReferenceCheck {
             if (!row.has(wanted)) {
                 found.add(Defect.at(place, "key-absent", wanted));
             } else if (!kind.relative()) {
-                Dimension dimension = kind == Instrument.REPOSE || kind == Instrument.SURCHARGE ? Dimension.ANGLE
-                        : Dimension.LENGTH;
+                Dimension dimension = kind.angle() ? Dimension.ANGLE : Dimension.LENGTH;
                 Quantity spread = row.quantity(wanted).orElseThrow();
                 if (spread.unit().dimension() != dimension) {
                     found.add(Defect.at(place.child(wanted).child("unit"), "unit-of-wrong-kind",

@@ -5,7 +5,6 @@ import bedmark.engine.verdict.Level;
 import bedmark.index.office.ZoneNames;
 import bedmark.office.FlatColumn.FlatRow;
 import bedmark.survey.Act;
-import bedmark.survey.InspectionStatus;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Survey;
 import bedmark.survey.merge.Clash;
@@ -73,8 +72,7 @@ public record Conflict(ZoneNames names, Clash.Kind kind, List<Side> sides) {
                 .filter(received -> pack.equals(Optional.of(received.sha256()))).findFirst()
                 .map(received -> received.deviceName().isBlank() ? received.fingerprint() : received.deviceName())
                 .orElse("");
-        return new Side(row.copy(), row.survey(), device, row.judged().filter(one ->
-                row.survey().inspectionStatus() == InspectionStatus.INSPECTED).map(JudgedZone::assessment));
+        return new Side(row.copy(), row.survey(), device, FlatColumn.judged(row).map(JudgedZone::assessment));
     }
 
     /** What the sides say differently. */

@@ -94,7 +94,8 @@ record FlatColumn(String name, String type, String unit, String says, Function<F
         return new FlatColumn(name, "flag", "", says, row -> Boolean.toString(cell.apply(row)));
     }
 
-    private static Optional<JudgedZone> judged(FlatRow row) {
+    /** What an inspection comes to; nothing where there was none, or it can't be judged. */
+    static Optional<JudgedZone> judged(FlatRow row) {
         return row.judged().filter(one -> row.survey().inspectionStatus() == InspectionStatus.INSPECTED);
     }
 

@@ -31,6 +31,11 @@ public final class PlantEnergy {
     public record Bar(String plant, String area, String name, double wh, boolean shaft, OptionalDouble cost,
                       OptionalDouble co2, Optional<String> currency, double savedWh, OptionalDouble savedCost,
                       Optional<RankedZone> best, int zones, int lacking) {
+
+        /** Whether any zone has a figure: without one the sum is not nothing, but unknown. */
+        public boolean known() {
+            return zones > 0;
+        }
     }
 
     private PlantEnergy() {

@@ -69,6 +69,11 @@ public enum Instrument {
         return spread;
     }
 
+    /** Whether the spread is an angle (rad); one that is none and no share of the value is a length (m). */
+    public boolean angle() {
+        return this == REPOSE || this == SURCHARGE;
+    }
+
     /** Whether the spread is a share of the value. */
     public boolean relative() {
         return relative;

@@ -4,6 +4,7 @@ import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.engine.drag.DragMethod;
+import bedmark.engine.verdict.Certainty;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Map;
@@ -26,9 +27,6 @@ final class PlantSheet {
             "currency", List.of("tariff", "currency"), "overloadedFrom", List.of("limits", "certainty", "overloaded"),
             "undecidedFrom", List.of("limits", "certainty", "undecided"),
             "nearFrom", List.of("limits", "certainty", "near"));
-    /** What holds where the site says nothing of its own; the engine's standard. */
-    private static final BigDecimal OVERLOADED = new BigDecimal("0.9");
-    private static final BigDecimal UNDECIDED = new BigDecimal("0.1");
 
     private PlantSheet() {
     }
@@ -75,8 +73,9 @@ final class PlantSheet {
 
     /** What is wrong with a plant's row that no single cell tells. */
     static Optional<Defect> proof(Branch row, String where) {
-        BigDecimal undecided = row.number("undecidedFrom").orElse(UNDECIDED);
-        BigDecimal overloaded = row.number("overloadedFrom").orElse(OVERLOADED);
+        Certainty standard = Certainty.standard();
+        BigDecimal undecided = row.number("undecidedFrom").orElse(BigDecimal.valueOf(standard.undecided()));
+        BigDecimal overloaded = row.number("overloadedFrom").orElse(BigDecimal.valueOf(standard.overloaded()));
         return undecided.compareTo(overloaded) > 0 ? Optional.of(Defect.in(where, "row-certainty-crossed",
                 undecided.toPlainString(), overloaded.toPlainString())) : Optional.empty();
     }

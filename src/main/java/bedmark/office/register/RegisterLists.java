@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 
 /** The lists of a register by the ids of their rows, as its document holds them. */
 final class RegisterLists {
@@ -37,14 +38,10 @@ final class RegisterLists {
         return Column.LISTS.get(Column.LIMITS).get(0).kind() instanceof Kind.Word word && word.words().contains(key);
     }
 
-    /** What a row is known by in its list. */
+    /** What a row is known by in its list; of a round's rows the round is. */
     static String id(String list, Branch row) {
-        return switch (list) {
-            case Column.LIMITS -> row.text("rule").orElse("");
-            case Column.INSTRUMENTS -> row.text("kind").orElse("");
-            case Column.SEAL_RATES -> row.text("type").orElse("") + " " + row.text("condition").orElse("");
-            default -> row.text("id").orElse("");
-        };
+        List<String> keys = list.equals(Column.ROUNDS) ? List.of("id") : Column.identity(list);
+        return keys.stream().map(key -> row.text(key).orElse("")).collect(Collectors.joining(" "));
     }
 
     /** The head with these lists in it; what is in no list stays as it was. */

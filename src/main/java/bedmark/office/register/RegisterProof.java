@@ -13,6 +13,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /** What no single cell tells of a register; what stood there before and is not touched is nobody's fault now. */
 final class RegisterProof {
@@ -51,15 +52,16 @@ final class RegisterProof {
 
     /** Whether something of the register still names a row that is to go. */
     Optional<Defect> used(String list, String id, String where) {
-        String key = REFERENCES.getOrDefault(list, "");
-        Optional<String> user = now.get("transfers").values().stream().filter(row -> row.text(key)
-                .equals(Optional.of(id))).map(row -> row.text("id").orElse("")).findFirst();
-        if (list.equals("transfers")) {
-            user = now.get(Column.ROUNDS).values().stream().filter(round -> round.branches("points").stream()
-                    .anyMatch(point -> point.text("transfer").equals(Optional.of(id))))
-                    .map(row -> row.text("id").orElse("")).findFirst();
-        }
-        return user.map(name -> Defect.in(where, "row-still-used", name));
+        Stream<Branch> users = list.equals("transfers")
+                ? now.get(Column.ROUNDS).values().stream().filter(round -> round.branches("points").stream()
+                        .anyMatch(point -> names(point, "transfer", id)))
+                : now.get("transfers").values().stream().filter(row -> REFERENCES.containsKey(list)
+                        && names(row, REFERENCES.get(list), id));
+        return users.findFirst().map(row -> Defect.in(where, "row-still-used", row.text("id").orElse("")));
+    }
+
+    private static boolean names(Branch row, String key, String id) {
+        return row.text(key).equals(Optional.of(id));
     }
 
     /** Lengths and angles have an uncertainty in their unit, everything else one as a share of the value. */
@@ -69,11 +71,10 @@ final class RegisterProof {
             return row.has("relative") && !row.has("standardUncertainty") ? Optional.empty()
                     : Optional.of(Defect.in(where, "row-uncertainty-share", kind.code()));
         }
-        Dimension wanted = kind == Instrument.REPOSE || kind == Instrument.SURCHARGE ? Dimension.ANGLE
-                : Dimension.LENGTH;
+        Dimension wanted = kind.angle() ? Dimension.ANGLE : Dimension.LENGTH;
         boolean fits = row.quantity("standardUncertainty").filter(one -> one.unit().dimension() == wanted).isPresent();
         return fits && !row.has("relative") ? Optional.empty() : Optional.of(Defect.in(where,
-                wanted == Dimension.ANGLE ? "row-uncertainty-angle" : "row-uncertainty-length", kind.code()));
+                kind.angle() ? "row-uncertainty-angle" : "row-uncertainty-length", kind.code()));
     }
 
     /**

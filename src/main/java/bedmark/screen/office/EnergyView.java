@@ -92,8 +92,10 @@ final class EnergyView extends VBox {
     }
 
     private Label words(Bar bar) {
-        List<String> words = new ArrayList<>(List.of(wording.text(bar.shaft() ? "office.energy.shaft"
-                : "office.energy.electrical", mwh(bar.wh()))));
+        List<String> words = new ArrayList<>();
+        if (bar.known()) {
+            words.add(wording.text(bar.shaft() ? "office.energy.shaft" : "office.energy.electrical", mwh(bar.wh())));
+        }
         if (bar.cost().isPresent()) {
             words.add(wording.format().computed(bar.cost().getAsDouble(), 0) + " " + bar.currency().orElse(""));
         }

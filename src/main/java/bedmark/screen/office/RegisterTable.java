@@ -3,6 +3,7 @@ package bedmark.screen.office;
 import bedmark.office.register.RegisterGrid;
 import bedmark.screen.Listening;
 import bedmark.screen.office.RegisterLine.Shown;
+import bedmark.screen.theme.Density;
 import bedmark.wording.Wording;
 import java.util.List;
 import java.util.Optional;
@@ -13,20 +14,22 @@ import javafx.scene.control.TableView;
 
 /** One list of the register as a table whose cells are typed into where they stand. */
 final class RegisterTable extends TableView<RegisterLine> {
-    /** Width of a character and around a text, and how wide a column becomes by itself, in pixels. */
-    private static final double CHARACTER = 9.5;
-    private static final double AROUND = 30;
-    private static final double NARROWEST = 80;
-    private static final double WIDEST = 330;
+    /** Width of a character and around a text, and how wide a column becomes by itself (mm, as the letters are). */
+    private static final double CHARACTER = 1.62;
+    private static final double AROUND = 5.1;
+    private static final double NARROWEST = 13.6;
+    private static final double WIDEST = 56;
 
     private final RegisterModel model;
     private final Wording wording;
+    private final Density density;
     private List<String> keys = List.of();
     private String list = "";
 
-    RegisterTable(RegisterModel model, Wording wording, Listening listening) {
+    RegisterTable(RegisterModel model, Wording wording, Density density, Listening listening) {
         this.model = model;
         this.wording = wording;
+        this.density = density;
         setId("register-table");
         setEditable(true);
         getSelectionModel().setCellSelectionEnabled(true);
@@ -53,8 +56,8 @@ final class RegisterTable extends TableView<RegisterLine> {
         column.setSortable(false);
         column.setReorderable(false);
         int longest = grid.rows().stream().mapToInt(row -> row.get(index).length()).max().orElse(0);
-        column.setPrefWidth(Math.min(WIDEST, Math.max(NARROWEST, AROUND + CHARACTER * Math.max(longest,
-                head.length()))));
+        column.setPrefWidth(density.mm(Math.min(WIDEST, Math.max(NARROWEST, AROUND + CHARACTER * Math.max(longest,
+                head.length())))));
         column.setCellValueFactory(cell -> cell.getValue().cell(index));
         column.setCellFactory(made -> new RegisterCell(model, key, index > 0));
         return column;

@@ -6,6 +6,8 @@ import bedmark.screen.Listening;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
+import bedmark.screen.theme.Density;
+import bedmark.screen.theme.Hand;
 import bedmark.wording.Wording;
 import java.nio.file.Path;
 import java.util.List;
@@ -48,7 +50,8 @@ final class RegisterView extends VBox {
             written.setText(path.map(one -> wording.text("office.register.saved", one)).orElse(""));
             written.setManaged(path.isPresent());
         });
-        RegisterTable table = new RegisterTable(model, wording, listening);
+        RegisterTable table = new RegisterTable(model, wording,
+                new Density(desk.preferences().dpi(), Hand.BARE), listening);
         getChildren().addAll(plants, lists, new RegisterRowTools(model, table, wording, buttons(), listening), written,
                 middle);
         listening.to(model.gridProperty(), grid -> {

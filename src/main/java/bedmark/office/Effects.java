@@ -80,7 +80,7 @@ final class Effects implements Books.Effect {
     /** What came in by it; what its zones come to is told when all of them are in. */
     private List<Copy> of(OfficeTables tables, Entry entry, OfficeDeed deed, Optional<Intake> intake) {
         if (deed instanceof OfficeDeed.PackReceived pack) {
-            return take(tables, entry.sequence(), pack, intake.orElseGet(() -> read(pack.sha256())));
+            return take(tables, entry, pack, intake.orElseGet(() -> read(pack.sha256())));
         } else if (deed instanceof OfficeDeed.RegisterChanged changed) {
             PlantRow row = Intake.plant(changed.head(), Intake.millis(entry.at()), true);
             Register register = registers.of(row);
@@ -98,8 +98,8 @@ final class Effects implements Books.Effect {
         return Intake.of(pack.bundle(), sha256);
     }
 
-    private List<Copy> take(OfficeTables tables, long sequence, OfficeDeed.PackReceived pack, Intake intake) {
-        tables.addPack(pack.sha256(), sequence, shelf.forTables(pack.sha256()));
+    private List<Copy> take(OfficeTables tables, Entry entry, OfficeDeed.PackReceived pack, Intake intake) {
+        tables.addPack(pack.sha256(), entry.sequence(), shelf.forTables(pack.sha256()));
         tables.addRegister(intake.plant().register(), intake.plant().id(), intake.register());
         Optional<PlantRow> known = tables.plant(intake.plant().id());
         boolean newer = known.isEmpty() || !known.get().own() && later(intake.plant(), known.get());
@@ -111,8 +111,10 @@ final class Effects implements Books.Effect {
         } else if (newer) {
             put(tables, holds, registers.of(holds));
         }
-        Set<String> touched = tables.add(intake.copies());
-        List<Copy> added = intake.copies().stream().map(CopyRow::copy).filter(copy -> touched.contains(copy.digest()))
+        long came = Intake.millis(entry.at());
+        List<CopyRow> copies = intake.copies().stream().map(row -> row.receivedAt(came)).toList();
+        Set<String> touched = tables.add(copies);
+        List<Copy> added = copies.stream().map(CopyRow::copy).filter(copy -> touched.contains(copy.digest()))
                 .toList();
         if (!added.isEmpty()) {
             tables.addUnnamed(Set.copyOf(added.stream().map(Copy::zone).distinct().toList()),
@@ -130,7 +132,8 @@ final class Effects implements Books.Effect {
         tables.name(row.id(), register.name(), Intake.names(register));
     }
 
-    private static void stand(OfficeTables tables, Collection<ZoneId> zones, Minutes minutes) {
+    /** Says what counts of zones by what the tables hold of them. */
+    static void stand(OfficeTables tables, Collection<ZoneId> zones, Minutes minutes) {
         List<Copy> copies = tables.copies(zones);
         Set<String> aside = minutes.setAside();
         List<Standing> standings = Merge.zones(copies, aside).values().stream().map(Standings::of).toList();

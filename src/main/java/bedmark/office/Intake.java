@@ -105,7 +105,7 @@ record Intake(PlantRow plant, byte[] register, List<CopyRow> copies) {
         Copy copy = new Copy(Digest.of(text).hex(), survey.id(), survey.revision(), survey.supersedes(),
                 new ZoneId(plantId(register), survey.transfer()), survey.round().orElse(""),
                 underWay ? InspectionStatus.NOT_INSPECTED : status, moment(survey.startedAt()), completed,
-                new Origin(createdAt, registerDigest, conveyor));
+                new Origin(createdAt, registerDigest, conveyor), OptionalLong.empty());
         return new CopyRow(copy, pack, text);
     }
 

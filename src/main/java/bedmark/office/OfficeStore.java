@@ -362,6 +362,8 @@ public final class OfficeStore implements AutoCloseable {
                 // What is judged must not change before it is written down.
                 tables.alone();
                 List<ZoneId> zones = tables.waiting(JUDGED_AT_ONCE);
+                // An earlier program let them stand by the clock of the tablet.
+                Effects.stand(tables, tables.datedAhead(zones), minutes(tables));
                 Map<ZoneId, Optional<Verdict>> verdicts = new LinkedHashMap<>();
                 results.latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
                         sides.stream().min(Judge.WORST_FIRST).map(worst -> Judge.verdict(worst.assessment()))));

@@ -7,6 +7,7 @@ import bedmark.index.office.Standing;
 import bedmark.index.office.Verdict;
 import bedmark.index.office.ZoneGist;
 import bedmark.index.office.ZoneRow;
+import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.ZoneId;
 import java.time.Duration;
 import java.time.Instant;
@@ -32,8 +33,6 @@ final class Ranking {
     /** From so many on it pays to share the work among the processors. */
     private static final int MANY = 10_000;
     private static final double UNKNOWN = -1;
-    /** A clock may be ahead of the office's by so much: that of a tablet in another zone of time, or set by hand. */
-    private static final Duration AHEAD = Duration.ofDays(1);
     private static final Comparator<Ordered> BY_NUMBERS =
             Comparator.comparingDouble(Ordered::driveShare).thenComparingDouble(Ordered::saving).reversed();
     private static final Comparator<Ordered> WORST_FIRST =
@@ -190,7 +189,7 @@ final class Ranking {
 
     /** Whether a day lies ahead that no clock can be right about. */
     private boolean ahead(Instant moment) {
-        return moment.isAfter(now.plus(AHEAD));
+        return moment.isAfter(now.plus(Copy.SLACK));
     }
 
     /** Never negative. */

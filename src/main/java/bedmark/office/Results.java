@@ -18,6 +18,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.function.Function;
+import java.util.stream.Collectors;
 
 /** Surveys of the tables, judged beside what loaded the same drives. */
 final class Results {
@@ -42,17 +43,19 @@ final class Results {
 
     /**
      * A zone over time. Of contents that clash the worst counts, as it does in the list: they are one survey, and two
-     * points of it would be a trend of its own.
+     * points of it would be a trend of its own. Those that were dated ahead are no points: nobody knows when they were.
      */
     ZoneTrend trend(OfficeTables tables, ZoneId zone) {
         List<Copy> copies = tables.copies(List.of(zone));
         MergedZone merged = Merge.zone(zone, copies, minutes.apply(tables).setAside());
         List<Copy> results = merged.results();
-        List<JudgedZone> counted = judged(tables, results, copy -> copy.origin().register());
-        List<JudgedZone> replaced = judged(tables, copies.stream().filter(copy -> copy.result()
+        Map<Boolean, List<JudgedZone>> counted = judged(tables, results, copy -> copy.origin().register()).stream()
+                .collect(Collectors.partitioningBy(one -> one.copy().datedAhead()));
+        List<JudgedZone> replaced = judged(tables, copies.stream().filter(copy -> copy.result() && !copy.datedAhead()
                 && results.stream().noneMatch(one -> one.digest().equals(copy.digest()))).toList(),
                 copy -> copy.origin().register());
-        return ZoneTrend.of(zone, oneSide(counted, merged.clashes()), replaced, merged.clashes().size());
+        return ZoneTrend.of(zone, oneSide(counted.get(false), merged.clashes()), replaced, counted.get(true),
+                merged.clashes().size());
     }
 
     private static List<JudgedZone> oneSide(List<JudgedZone> judged, List<Clash> clashes) {

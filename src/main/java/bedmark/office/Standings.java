@@ -3,7 +3,6 @@ package bedmark.office;
 import bedmark.index.office.Standing;
 import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.MergedZone;
-import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
 
@@ -14,11 +13,10 @@ final class Standings {
 
     static Standing of(MergedZone zone) {
         Optional<Copy> last = zone.last();
-        List<Copy> latest = zone.latest();
-        Optional<Copy> newest = latest.isEmpty() ? Optional.empty() : Optional.of(latest.get(latest.size() - 1));
+        Optional<Copy> newest = zone.newest();
         return new Standing(zone.zone(), last.map(Copy::digest), last.map(Copy::status), moment(last),
                 newest.map(Copy::digest), moment(newest), zone.clashes().size(),
-                zone.visits().stream().anyMatch(Copy::clockWrong));
+                zone.visits().stream().anyMatch(copy -> copy.clockWrong() || copy.datedAhead()));
     }
 
     private static OptionalLong moment(Optional<Copy> copy) {

@@ -65,6 +65,9 @@ public final class TrendTelling {
         if (trend.clashes() > 0) {
             say(lines, "", "office.trend.clashes", trend.clashes());
         }
+        if (trend.undated() > 0) {
+            say(lines, "", "office.trend.undated", trend.undated());
+        }
         say(lines, "", "office.interval." + trend.interval().reason().code(), trend.interval().days(),
                 wording.format().computed(trend.interval().pfDays().orElse(0), 0));
         if (own.isPresent()) {

@@ -106,7 +106,7 @@ class StoreCommandsTest {
         fine("store", "check", other.toString());
         Terminal.Result again = fine("store", "restore", stick.toString(), "--to", other.toString());
         assertTrue(again.out().startsWith("Nothing new"), again.out());
-        assertTrue(fine("store", "check", home.toString()).out().contains("Last backup 2026-03-12 09:42:07"));
+        assertTrue(fine("store", "check", home.toString()).out().contains("Last backup 2026-10-01 09:42:07"));
         assertEquals(3, Terminal.run("store", "restore", temp.resolve("none").toString(), "--to",
                 other.toString()).code());
         assertEquals(2, Terminal.run("store", "backup", home.toString()).code());

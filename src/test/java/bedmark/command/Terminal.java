@@ -31,7 +31,7 @@ public final class Terminal {
         StringWriter err = new StringWriter();
         int code = BedmarkCommand.run(new Surroundings(new PrintWriter(out), new PrintWriter(err),
                 Optional.of(Path.of("").toAbsolutePath()),
-                Clock.fixed(Instant.parse("2026-03-12T09:42:07Z"), ZoneOffset.UTC), new Words(Locale.ENGLISH),
+                Clock.fixed(Instant.parse("2026-10-01T09:42:07Z"), ZoneOffset.UTC), new Words(Locale.ENGLISH),
                 (store, samples, load) -> false, showing), arguments);
         return new Result(code, out.toString(), err.toString());
     }

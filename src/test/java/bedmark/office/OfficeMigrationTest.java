@@ -10,6 +10,7 @@ import bedmark.index.office.Verdict;
 import bedmark.index.office.ZoneNames;
 import bedmark.index.office.ZoneRow;
 import bedmark.survey.InspectionStatus;
+import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.ZoneId;
 import java.nio.file.Path;
 import java.sql.Connection;
@@ -22,6 +23,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalLong;
+import java.util.UUID;
 import org.flywaydb.core.Flyway;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
@@ -31,6 +33,10 @@ import org.junit.jupiter.api.io.TempDir;
 class OfficeMigrationTest {
     private static final String NAMES = "insert into zone (zone, plant, transfer, plant_name, area, conveyor, "
             + "conveyor_tag, tag, asset, material, registered, clashes, clock_wrong, judged";
+
+    private static final String SURVEYS = "insert into survey (digest, id, revision, zone, round, status, begun, "
+            + "finished, made, register, conveyor, drive, pack, content) select digest, '" + new UUID(3, 4) + "', 1, "
+            + "'/north/TP-1', '', 'INSPECTED', at, at, at, 'r', 'C1', 'd', '9f', '' from (values ";
 
     @TempDir
     private Path folder;
@@ -73,6 +79,11 @@ class OfficeMigrationTest {
                     + "'NOT_ACCESSIBLE', 1750000000001, 0.5)");
             statement.executeUpdate(NAMES + ") values ('/a~1b/TP-1', 'a/b', 'TP-1', 'A', '', '', '', 'TP-1', '', '', "
                     + "false, 0, false, false)");
+            // Sent at noon: one told of an hour before it, one of the day after the next.
+            statement.executeUpdate("insert into deed (seq, made_at, person, device, code, payload) values (7, "
+                    + "'2025-06-15T12:00+02:00', 'Ida Marsh', '" + new UUID(1, 2) + "', 'pack-received', '')");
+            statement.executeUpdate("insert into pack (sha256, seq) values ('9f', 7)");
+            statement.executeUpdate(SURVEYS + "('ab12', 1749978000000), ('ef56', 1750161600000)) as told (digest, at)");
         }
     }
 
@@ -109,5 +120,9 @@ class OfficeMigrationTest {
         assertEquals(List.of(second, first), tables.worst(4, 10).stream().map(PackedZone::zone).sorted(
                 Comparator.comparing(ZoneId::transfer).reversed()).toList());
         assertEquals(0, tables.countWaiting());
+        Map<String, Copy> copies = tables.copiesOf(List.of("ab12", "ef56"));
+        assertEquals(OptionalLong.empty(), copies.get("ab12").came());
+        assertEquals(OptionalLong.of(1_749_981_600_000L), copies.get("ef56").came(), "dated ahead of when it came");
+        assertEquals(List.of(first), tables.datedAhead(List.of(first, second, third)));
     }
 }

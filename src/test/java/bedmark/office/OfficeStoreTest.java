@@ -2,6 +2,7 @@ package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -11,9 +12,10 @@ import bedmark.document.Refused;
 import bedmark.engine.verdict.Level;
 import bedmark.journal.Digest;
 import bedmark.journal.Progress;
+import bedmark.office.trend.Interval;
 import bedmark.office.trend.Outlook;
+import bedmark.office.trend.ZoneTrend;
 import bedmark.survey.OfficeDeed;
-import java.util.Optional;
 import bedmark.survey.Assessor;
 import bedmark.survey.Bundle;
 import bedmark.survey.InspectionStatus;
@@ -24,12 +26,14 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Duration;
+import java.time.Instant;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Random;
 import java.util.TreeMap;
 import java.util.stream.Collectors;
@@ -39,6 +43,8 @@ import org.junit.jupiter.api.io.TempDir;
 
 /** Packs of the demo plant received in an office. */
 class OfficeStoreTest {
+    private static final ZoneId HEALTHY = new ZoneId("ostermere", "TP-14");
+
     @TempDir
     private Path folder;
 
@@ -95,19 +101,75 @@ class OfficeStoreTest {
     void aSurveyThatAFastClockDatedAheadIsNeverHealthyAndNamesTheClock() {
         Bundle bundle = Offices.sample("round-2026-03");
         try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
-            store.receive(packOf("round-2026-03"), "Ida Marsh");
-            RankedZone healthy = store.rank().stream().filter(zone -> zone.place() == Place.WITHIN).findFirst()
-                    .orElseThrow();
-            Branch survey = bundle.document().branches("surveys").stream().filter(one -> one.text("transfer")
-                    .equals(Optional.of(healthy.zone().transfer()))).findFirst().orElseThrow();
-            assertEquals(Place.WITHIN, received(store, bundle, survey, "2026-10-01", healthy.zone()).place());
-            RankedZone ahead = received(store, bundle, survey, "2036-03-18", healthy.zone());
+            RankedZone ahead = received(store, bundle, survey(bundle, HEALTHY), "2036-03-18", HEALTHY);
             assertEquals(Place.STALE, ahead.place());
             assertEquals(Optional.of(Level.WITHIN), ahead.level());
             assertTrue(ahead.stale());
             assertTrue(ahead.clockWrong());
             assertEquals(Optional.empty(), ahead.age());
+            assertEquals(1, store.trend(HEALTHY).undated());
+            assertEquals(List.of(), store.trend(HEALTHY).series());
         }
+    }
+
+    @Test
+    void aSurveyThatAFastClockDatedAheadHidesNoneWhoseDateCanBeBelieved() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        Branch healthy = survey(bundle, HEALTHY);
+        Branch heaped = healthy.with("readings", heaped(healthy.branch("readings").orElseThrow()));
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
+            assertEquals(Place.OVERLOADED, received(store, bundle, heaped, "2026-03-20", HEALTHY).place());
+            RankedZone hidden = received(store, bundle, healthy, "2036-03-18", HEALTHY);
+            assertEquals(Place.OVERLOADED, hidden.place());
+            assertEquals(Optional.of(Level.OVERLOADED), hidden.level());
+            assertEquals(Optional.of(Instant.parse("2026-03-20T11:20:00Z")), hidden.surveyed());
+            assertTrue(hidden.clockWrong());
+            assertEquals(hidden, store.worst(RankQuery.ALL, 1, Progress.NONE).get(0));
+            assertEquals(hidden.survey(), store.judged(HEALTHY).map(one -> one.copy().digest()));
+            assertEquals(hidden.survey(), store.judgedToday(HEALTHY).map(one -> one.copy().digest()));
+            ZoneTrend trend = store.trend(HEALTHY);
+            assertEquals(1, trend.undated());
+            assertTrue(trend.series().stream().allMatch(series -> series.observations().size() == 1));
+            RankedZone mended = received(store, bundle, healthy, "2026-10-01", HEALTHY);
+            assertEquals(Place.WITHIN, mended.place());
+            assertTrue(mended.clockWrong());
+        }
+    }
+
+    @Test
+    void aZoneIsAsBadAsASurveyDatedAheadThatMayBeNewerUntilOneIsMadeAfterThatCame() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        Branch healthy = survey(bundle, HEALTHY);
+        Branch heaped = healthy.with("readings", heaped(healthy.branch("readings").orElseThrow()));
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
+            assertEquals(Place.WITHIN, received(store, bundle, healthy, "2026-03-20", HEALTHY).place());
+            RankedZone worse = received(store, bundle, heaped, "2026-10-09", HEALTHY);
+            assertEquals(Place.OVERLOADED, worse.place());
+            assertEquals(Optional.of(Instant.parse("2026-03-20T11:20:00Z")), worse.surveyed());
+            assertEquals(Interval.Reason.OVERLOADED, store.trend(HEALTHY).interval().reason());
+            RankedZone newer = received(store, bundle, healthy, "2026-10-01", HEALTHY);
+            assertEquals(Place.WITHIN, newer.place());
+            assertEquals(Optional.of(Level.WITHIN), newer.level());
+            assertNotEquals(Interval.Reason.OVERLOADED, store.trend(HEALTHY).interval().reason());
+            assertEquals(newer, store.ranked(HEALTHY).orElseThrow());
+        }
+        try (OfficeStore later = OfficeStore.rebuild(folder.resolve("office"),
+                OfficeOptions.of(Clock.offset(Offices.NOW, Duration.ofDays(30))))) {
+            assertEquals(Place.WITHIN, later.ranked(HEALTHY).orElseThrow().place(),
+                    "its date being past does not make it believed");
+        }
+    }
+
+    private static Branch survey(Bundle bundle, ZoneId zone) {
+        return bundle.document().branches("surveys").stream().filter(one -> one.text("transfer")
+                .equals(Optional.of(zone.transfer()))).findFirst().orElseThrow();
+    }
+
+    /** The bed as high as the boards. */
+    private static Branch heaped(Branch readings) {
+        assertEquals(Optional.of("from-board-top"), readings.text("depthMethod"));
+        return readings.with("bedDepths", new Node.Series(readings.branches("bedDepths").stream().<Node>map(station ->
+                station.with("depth", station.branch("depth").orElseThrow().with("value", Node.number(1)))).toList()));
     }
 
     private RankedZone received(OfficeStore store, Bundle bundle, Branch survey, String day, ZoneId zone) {

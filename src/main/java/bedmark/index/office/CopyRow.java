@@ -19,15 +19,21 @@ import java.util.UUID;
  */
 public record CopyRow(Copy copy, String pack, byte[] content) {
     static final String COLUMNS =
-            "digest, id, revision, supersedes, zone, round, status, begun, finished, made, register, conveyor";
+            "digest, id, revision, supersedes, zone, round, status, begun, finished, made, register, "
+                    + "conveyor, came";
     static final String INSERT = "insert into survey (" + COLUMNS + ", drive, pack, content) "
-            + "values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)";
+            + "values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)";
 
     Object[] values() {
         Origin origin = copy.origin();
         return new Object[] {copy.digest(), copy.id(), copy.revision(), copy.supersedes().orElse(null),
             copy.zone().key(), copy.round(), copy.status().name(), boxed(copy.begun()), boxed(copy.finished()),
-            origin.createdAt(), origin.register(), origin.conveyor(), drive(copy), pack, content};
+            origin.createdAt(), origin.register(), origin.conveyor(), boxed(copy.came()), drive(copy), pack, content};
+    }
+
+    /** As the office takes it in at a moment (ms since 1970). */
+    public CopyRow receivedAt(long moment) {
+        return new CopyRow(copy.receivedAt(moment), pack, content);
     }
 
     /** What loads one drive together: the zones of one conveyor on one round. */
@@ -39,7 +45,8 @@ public record CopyRow(Copy copy, String pack, byte[] content) {
         return new Copy(row.getString(1), row.getObject(2, UUID.class), row.getInt(3),
                 Optional.ofNullable(row.getObject(4, UUID.class)), ZoneId.ofKey(row.getString(5)),
                 row.getString(6), InspectionStatus.valueOf(row.getString(7)), number(row, 8),
-                number(row, 9), new Origin(row.getLong(10), row.getString(11), row.getString(12)));
+                number(row, 9), new Origin(row.getLong(10), row.getString(11), row.getString(12)),
+                number(row, 13));
     }
 
     static Object boxed(OptionalLong value) {

@@ -22,7 +22,7 @@ import java.util.function.Supplier;
 public final class OfficeTables implements AutoCloseable {
 
     /** The version of the tables: the number of the last migration. */
-    static final String SCHEMA = "6";
+    static final String SCHEMA = "8";
     private static final String DEED = "insert into deed (seq, made_at, person, device, code, payload) "
             + "values (?, ?, ?, ?, ?, ?)";
     private static final String MOVED = "update survey set made = ?, register = ?, conveyor = ?, drive = ? "
@@ -243,6 +243,12 @@ public final class OfficeTables implements AutoCloseable {
     public Optional<String> packOf(String digest) {
         return link.rows("select pack from survey where digest = ?", row -> row.getString(1), digest).stream()
                 .findFirst();
+    }
+
+    /** Those of some zones that hold contents that were dated ahead. */
+    public List<ZoneId> datedAhead(Collection<ZoneId> some) {
+        return link.rows("select distinct zone" + WANTED + "survey on zone = wanted where came is not null",
+                row -> ZoneId.ofKey(row.getString(1)), link.texts(some.stream().map(ZoneId::key).toList()));
     }
 
     /** What was judged of zones whose latest result loaded one of these drives no longer holds. */

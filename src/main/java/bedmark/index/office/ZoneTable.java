@@ -121,10 +121,13 @@ final class ZoneTable {
         return value.filter(OptionalDouble::isPresent).map(OptionalDouble::getAsDouble).orElse(null);
     }
 
-    /** What was judged of zones whose latest result loaded one of these drives no longer holds. */
+    /**
+     * What was judged of zones whose latest result, or one dated ahead that may be newer, loaded one of these drives no
+     * longer holds.
+     */
     void stale(Collection<String> drives) {
-        link.rows("select z.zone, z.judged" + OfficeTables.WANTED
-                + "survey s on s.drive = wanted join zone z on z.latest = s.digest",
+        link.rows("select z.zone, z.judged" + OfficeTables.WANTED + "survey s on s.drive = wanted "
+                + "join zone z on z.zone = s.zone where z.latest = s.digest or s.came is not null",
                 row -> row.getBoolean(2) ? Optional.of(row.getString(1)) : Optional.<String>empty(),
                 link.texts(drives)).stream().flatMap(Optional::stream).forEach(zone -> link.batch(STALE, zone));
         link.runBatch(STALE);

@@ -36,7 +36,7 @@ public final class TrendDocument {
                 .with("interval", number(Branch.EMPTY.with("days", Node.number(trend.interval().days()))
                         .with("because", trend.interval().reason().code()), "daysFromNearToOverloaded",
                         trend.interval().pfDays()))
-                .with("clashes", Node.number(trend.clashes()));
+                .with("clashes", Node.number(trend.clashes())).with("undated", Node.number(trend.undated()));
     }
 
     private static Branch judged(Branch document, String key, Optional<JudgedZone> zone) {

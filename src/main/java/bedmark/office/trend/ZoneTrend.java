@@ -9,6 +9,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Stream;
 
 /**
  * A loading zone over time.
@@ -17,8 +18,10 @@ import java.util.Set;
  * @param changes  what is not as it was before, in time order
  * @param interval how often the zone should be looked at
  * @param clashes  surveys whose sides clash and wait for a person; of each the worst side is told
+ * @param undated  results that a wrong clock dated ahead, which have no place in time
  */
-public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, Interval interval, int clashes) {
+public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, Interval interval, int clashes,
+                        int undated) {
     public ZoneTrend {
         series = List.copyOf(series);
         changes = List.copyOf(changes);
@@ -29,9 +32,11 @@ public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, 
      *
      * @param counted  the results that count, in time order; of one survey no more than one
      * @param replaced results in whose place others stand
+     * @param undated  the results that were dated ahead
      * @param clashes  conflicts that wait for a person
      */
-    public static ZoneTrend of(ZoneId zone, List<JudgedZone> counted, List<JudgedZone> replaced, int clashes) {
+    public static ZoneTrend of(ZoneId zone, List<JudgedZone> counted, List<JudgedZone> replaced,
+                               List<JudgedZone> undated, int clashes) {
         List<Change> changes = Regimes.changes(counted);
         List<Series> series = new ArrayList<>();
         for (Measure measure : Measure.values()) {
@@ -46,11 +51,13 @@ public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, 
                         limits.overloaded()));
             }
         }
-        Optional<Level> latest = counted.stream().reduce((one, other) -> other)
-                .map(one -> one.assessment().worstLevel());
+        Optional<JudgedZone> last = counted.stream().reduce((one, other) -> other);
+        Optional<Level> latest = Stream.concat(last.stream(), undated.stream().filter(one ->
+                last.map(dated -> one.copy().mayFollow(dated.copy())).orElse(true)))
+                .map(one -> one.assessment().worstLevel()).reduce(Level::or);
         Interval interval = Interval.of(series.stream().filter(one -> one.measure() == Measure.DEPTH).findFirst(),
                 latest);
-        return new ZoneTrend(zone, series, changes, interval, clashes);
+        return new ZoneTrend(zone, series, changes, interval, clashes, undated.size());
     }
 
     private static void observe(Measure measure, JudgedZone zone, boolean replaced, List<Observation> into) {

@@ -14,7 +14,8 @@ import java.util.UUID;
 
 /**
  * Makes one of what came from many tablets. Contents are only ever added to each other, so that taking in is
- * commutative, associative and idempotent; which of them counts follows from all that are there and from nothing else.
+ * commutative, associative and idempotent; which of them counts follows from all that are there and from nothing else,
+ * but for one that was dated ahead: which of the results it may hide depends on when it came.
  *
  * <p>A survey that another one of a higher revision supersedes no longer counts, whatever the two tablets' clocks say.
  * Among those that count the last one completed leads. The same revision with another content, and two corrections of

@@ -52,7 +52,7 @@ class ZoneTrendTest {
         long moment = day.atStartOfDay(ZoneOffset.UTC).toInstant().toEpochMilli();
         Copy copy = new Copy(day.toString() + depthMm, UUID.nameUUIDFromBytes(day.toString().getBytes()), 1,
                 Optional.empty(), ZONE, "r", InspectionStatus.INSPECTED, OptionalLong.empty(), OptionalLong.of(moment),
-                new Origin(moment, "x", "c2"));
+                new Origin(moment, "x", "c2"), OptionalLong.empty());
         return new JudgedZone(ZONE, copy, survey, REGISTER, new Assessor(REGISTER).assess(survey, List.of()));
     }
 
@@ -70,7 +70,7 @@ class ZoneTrendTest {
 
     @Test
     void aRisingBedSaysWhenItWillBeOverloaded() {
-        ZoneTrend trend = ZoneTrend.of(ZONE, rising(8), List.of(), 0);
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(8), List.of(), List.of(), 0);
         Series depth = depth(trend);
         assertEquals(0.22, depth.near().getAsDouble(), 1e-12);
         assertEquals(0.25, depth.overloaded().getAsDouble(), 1e-12);
@@ -89,7 +89,7 @@ class ZoneTrendTest {
 
     @Test
     void fourSurveysAreTooFewToSay() {
-        ZoneTrend trend = ZoneTrend.of(ZONE, rising(4), List.of(), 0);
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(4), List.of(), List.of(), 0);
         assertEquals(new Outlook.TooFew(4, 5), depth(trend).outlook());
         assertEquals(Interval.Reason.TOO_FEW, trend.interval().reason());
         assertEquals(Interval.MOST, trend.interval().days());
@@ -126,8 +126,9 @@ class ZoneTrendTest {
                 LocalDate.of(2026, 1, 2)), new Outlook.Never())), Optional.of(new Outlook.Reached(
                 new Outlook.Beyond(), new Outlook.On(LocalDate.of(2027, 5, 6)), new Outlook.Beyond()))));
         ZoneTrend trend = new ZoneTrend(ZONE, List.of(series), List.of(), new Interval(7, Interval.Reason.OVERLOADED,
-                OptionalDouble.empty()), 0);
-        Branch outlook = TrendDocument.of(trend, Optional.empty(), Optional.empty()).branches("series").get(0).branch("outlook").orElseThrow();
+                OptionalDouble.empty()), 0, 0);
+        Branch outlook = TrendDocument.of(trend, Optional.empty(), Optional.empty()).branches("series").get(0)
+                .branch("outlook").orElseThrow();
         assertEquals(Plants.read("{'expected':'2027-01-02','earliest':'2026-01-02','latestIs':'never'}"),
                 outlook.branch("nearReached").orElseThrow());
         assertEquals(Plants.read("{'expectedIs':'beyond-ten-years','earliest':'2027-05-06',"
@@ -149,7 +150,7 @@ class ZoneTrendTest {
         for (int depth : depthsMm) {
             zones.add(survey(LocalDate.of(2025, 1, 1).plusMonths(zones.size()), depth, ""));
         }
-        return ZoneTrend.of(ZONE, zones, List.of(), 0).interval();
+        return ZoneTrend.of(ZONE, zones, List.of(), List.of(), 0).interval();
     }
 
     @Test
@@ -174,7 +175,7 @@ class ZoneTrendTest {
         List<JudgedZone> zones = rising(7);
         zones.add(survey(LocalDate.of(2025, 8, 1), 60, ",'materialRunning':'coal'"));
         zones.add(survey(LocalDate.of(2025, 9, 1), 62, ",'materialRunning':'coal'"));
-        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of(), 0);
+        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of(), List.of(), 0);
         assertEquals(List.of(Change.Kind.MATERIAL), trend.changes().stream().map(Change::kind).toList());
         assertEquals(new Outlook.TooFew(2, 5), depth(trend).outlook());
         assertEquals(9, depth(trend).observations().size(), "what was before is still shown");
@@ -191,13 +192,13 @@ class ZoneTrendTest {
                 + "'left','type':'oblique','condition':'sound','length':{'value':6,'unit':'m'}},{'side':'right',"
                 + "'type':'oblique','condition':'sound','length':{'value':6,'unit':'m'}}],"
                 + "'skirtSpacing':{'value':800,'unit':'mm'}"));
-        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of(), 0);
+        ZoneTrend trend = ZoneTrend.of(ZONE, zones, List.of(), List.of(), 0);
         assertEquals(List.of(Change.Kind.SPEED, Change.Kind.SEALS, Change.Kind.SEALS, Change.Kind.BOARDS),
                 trend.changes().stream().map(Change::kind).toList());
     }
 
     private static List<Change> changes(List<JudgedZone> zones) {
-        return ZoneTrend.of(ZONE, zones, List.of(), 0).changes();
+        return ZoneTrend.of(ZONE, zones, List.of(), List.of(), 0).changes();
     }
 
     private static List<JudgedZone> months(List<String> readings) {
@@ -268,17 +269,17 @@ class ZoneTrendTest {
             steady.add(survey(LocalDate.of(2025, 1, 1).plusMonths(i), depths[i], ""));
             falling.add(survey(LocalDate.of(2025, 1, 1).plusMonths(i), 200 - 10 * i, ""));
         }
-        assertInstanceOf(Outlook.Level.class, depth(ZoneTrend.of(ZONE, steady, List.of(), 0)).outlook());
+        assertInstanceOf(Outlook.Level.class, depth(ZoneTrend.of(ZONE, steady, List.of(), List.of(), 0)).outlook());
         Outlook.Trend trend = assertInstanceOf(Outlook.Trend.class,
-                depth(ZoneTrend.of(ZONE, falling, List.of(), 0)).outlook());
+                depth(ZoneTrend.of(ZONE, falling, List.of(), List.of(), 0)).outlook());
         assertTrue(trend.line().slope() < 0);
         assertTrue(trend.overloaded().isEmpty());
-        assertEquals(Interval.Reason.NO_TREND, ZoneTrend.of(ZONE, falling, List.of(), 0).interval().reason());
+        assertEquals(Interval.Reason.NO_TREND, ZoneTrend.of(ZONE, falling, List.of(), List.of(), 0).interval().reason());
     }
 
     @Test
     void aReplacedSurveyIsShownAndNotCounted() {
-        ZoneTrend trend = ZoneTrend.of(ZONE, rising(5), List.of(survey(LocalDate.of(2025, 3, 2), 400, "")), 0);
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(5), List.of(survey(LocalDate.of(2025, 3, 2), 400, "")), List.of(), 0);
         assertEquals(6, depth(trend).observations().size());
         Outlook.Trend outlook = assertInstanceOf(Outlook.Trend.class, depth(trend).outlook());
         assertEquals(10, outlook.test().s());

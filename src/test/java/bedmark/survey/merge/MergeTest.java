@@ -38,10 +38,11 @@ class MergeTest {
             int revision = random.nextInt(3) == 0 ? 2 + random.nextInt(2) : 1;
             OptionalLong begun = OptionalLong.of(random.nextInt(50));
             OptionalLong finished = random.nextInt(5) == 0 ? OptionalLong.empty() : OptionalLong.of(random.nextInt(60));
+            OptionalLong came = random.nextInt(6) == 0 ? OptionalLong.of(random.nextInt(60)) : OptionalLong.empty();
             contents.add(new Copy("digest" + (i * 7919 % 1000), id(id), revision, revision == 1 ? Optional.empty()
                     : Optional.of(id(random.nextInt(IDS))), new ZoneId("p", "t" + id % 2), "r" + random.nextInt(2),
                     InspectionStatus.values()[random.nextInt(InspectionStatus.values().length)], begun, finished,
-                    new Origin(0, "", "")));
+                    new Origin(0, "", ""), came));
         }
         return contents;
     }
@@ -57,7 +58,8 @@ class MergeTest {
         for (Copy copy : contents) {
             if (random.nextInt(3) == 0) {
                 told.add(new Copy(copy.digest(), copy.id(), copy.revision(), copy.supersedes(), copy.zone(),
-                        copy.round(), copy.status(), copy.begun(), copy.finished(), origin));
+                        copy.round(), copy.status(), copy.begun(), copy.finished(), origin,
+                        random.nextBoolean() ? copy.came() : OptionalLong.empty()));
             }
         }
         Collections.shuffle(told, random);

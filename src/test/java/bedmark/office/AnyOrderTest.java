@@ -6,9 +6,13 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.journal.Digest;
 import bedmark.journal.Progress;
+import bedmark.survey.merge.Copy;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Clock;
+import java.time.Instant;
+import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
@@ -22,6 +26,9 @@ import org.junit.jupiter.api.io.TempDir;
 /** Packs of three tablets received in many orders, some twice: the exports are the same bytes. */
 class AnyOrderTest {
     private static final int ORDERS = Integer.getInteger("bedmark.office.orders", 5);
+
+    /** The day after the last pack was made, by a clock that is right. */
+    private static final Clock NOW = Clock.fixed(Instant.parse("2026-03-24T08:00:00Z"), ZoneOffset.UTC);
 
     @TempDir
     private Path folder;
@@ -38,7 +45,8 @@ class AnyOrderTest {
             List<Path> shuffled = new ArrayList<>(packs);
             Collections.shuffle(shuffled, random);
             Path export = folder.resolve("export" + order);
-            try (OfficeStore store = Offices.trusting(folder.resolve("office" + order), keys)) {
+            try (OfficeStore store = OfficeStore.open(folder.resolve("office" + order), OfficeOptions.of(NOW))) {
+                Stream.of(keys).forEach(key -> store.trust(Offices.fingerprint(key), "", "Ida Marsh"));
                 for (Path pack : shuffled) {
                     Received received = store.receive(pack, "Ida Marsh");
                     assertInstanceOf(Received.Taken.class, received, received::toString);
@@ -51,6 +59,8 @@ class AnyOrderTest {
                     ranked = Offices.told(store);
                     assertTrue(store.rank().stream().anyMatch(zone -> zone.clashes() > 0), "there are conflicts");
                     assertTrue(store.rank().stream().anyMatch(RankedZone::clockWrong), "there are wrong clocks");
+                    assertTrue(store.rank().stream().anyMatch(zone -> store.merged(zone.zone()).visits().stream()
+                            .anyMatch(Copy::datedAhead)), "some are dated ahead of the office");
                     assertTrue(first.keySet().stream().filter(name -> name.startsWith("registers")).count() > 1,
                             "the register changes");
                 }

@@ -2,6 +2,7 @@ package bedmark.office;
 
 import bedmark.document.Branch;
 import bedmark.document.Defect;
+import bedmark.pack.PackSender;
 import java.nio.file.Path;
 import java.util.Optional;
 
@@ -11,16 +12,22 @@ import java.util.Optional;
  * @param laid   its copy in the store's folder
  * @param sound  what it brings, where it is sound
  * @param defect why it is refused, where it is not
+ * @param signer who signed it, where that is proved
  */
-record Proved(Path file, Optional<PackShelf.Laid> laid, Optional<Sound> sound, Optional<Defect> defect) {
+record Proved(Path file, Optional<PackShelf.Laid> laid, Optional<Sound> sound, Optional<Defect> defect,
+              Optional<PackSender> signer) {
 
     /**
      * A pack that is sound.
      *
-     * @param fingerprint of the key that signed it
-     * @param head        the bundle's own id, time and device
+     * @param signer who signed it
+     * @param head   the bundle's own id, time and device
      */
-    record Sound(Path file, Books.Pack pack, String fingerprint, Branch head) {
+    record Sound(Path file, Books.Pack pack, PackSender signer, Branch head) {
+        String fingerprint() {
+            return signer.fingerprint().text();
+        }
+
         String sha256() {
             return pack.laid().sha256();
         }
@@ -32,15 +39,16 @@ record Proved(Path file, Optional<PackShelf.Laid> laid, Optional<Sound> sound, O
         /** The tablet's name, or its fingerprint where it has none. */
         String shown() {
             String name = device().text("name").orElse("");
-            return name.isBlank() ? fingerprint : name;
+            return name.isBlank() ? fingerprint() : name;
         }
     }
 
     static Proved sound(Sound sound) {
-        return new Proved(sound.file(), Optional.of(sound.pack().laid()), Optional.of(sound), Optional.empty());
+        return new Proved(sound.file(), Optional.of(sound.pack().laid()), Optional.of(sound), Optional.empty(),
+                Optional.of(sound.signer()));
     }
 
-    static Proved refused(Path file, Optional<PackShelf.Laid> laid, Defect defect) {
-        return new Proved(file, laid, Optional.empty(), Optional.of(defect));
+    static Proved refused(Path file, Optional<PackShelf.Laid> laid, Defect defect, Optional<PackSender> signer) {
+        return new Proved(file, laid, Optional.empty(), Optional.of(defect), signer);
     }
 }

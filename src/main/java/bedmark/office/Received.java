@@ -43,12 +43,22 @@ public sealed interface Received {
             implements Received {
     }
 
+    /** What a file holds: its SHA-256, hexadecimal, and its size (bytes). */
+    record Content(String sha256, long bytes) {
+    }
+
     /**
      * It was refused for one reason; nothing was done.
      *
-     * @param fingerprint of the key that signed it, where the pack itself is sound
+     * @param content nothing where the file could not be read to its end
+     * @param sender  whom it is from; nothing where the file could not be read to its end
      */
-    record Turned(Path file, Defect why, Optional<String> fingerprint) implements Received {
+    record Turned(Path file, Defect why, Optional<Content> content, Optional<Sender> sender) implements Received {
+
+        /** Of the key that signed it, where that is proved. */
+        public Optional<String> fingerprint() {
+            return sender.flatMap(Sender::fingerprint);
+        }
 
         /** Whether it is sound, and only nobody has vouched for its device yet. */
         public boolean untrusted() {

@@ -10,6 +10,7 @@ import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.office.Proved.Sound;
 import bedmark.pack.PackReader;
+import bedmark.pack.PackSender;
 import bedmark.pack.ReadPack;
 import bedmark.pack.Receipt;
 import bedmark.survey.Act;
@@ -99,18 +100,21 @@ final class Receiving {
             }
             Ids.prove(pack.bundle().register(), pack.bundle().surveys());
             Intake intake = Intake.of(pack.bundle(), laid.get().sha256());
-            return Proved.sound(new Sound(file, new Books.Pack(laid.get(), intake), pack.fingerprint().text(), head));
+            return Proved.sound(new Sound(file, new Books.Pack(laid.get(), intake), new PackSender(pack.fingerprint(),
+                    head.branch("device").flatMap(device -> device.text("name"))), head));
         } catch (Refused e) {
             boolean copied = laid.filter(copy -> e.defect().where().equals(copy.part().toString())).isPresent();
             return Proved.refused(file, laid, copied
-                    ? new Defect(e.defect().code(), file.toString(), e.defect().details()) : e.defect());
+                    ? new Defect(e.defect().code(), file.toString(), e.defect().details()) : e.defect(),
+                    laid.flatMap(copy -> PackSender.of(copy.part(), options.limits())));
         }
     }
 
     /** What comes of packs, in their order. */
     private List<Received> take(List<Proved> packs, String person) {
-        Set<String> trusted = store.ask(tables -> packs.stream().flatMap(proved -> proved.sound().stream())
-                .map(Sound::fingerprint).filter(store.minutes(tables)::trusts).collect(Collectors.toSet()));
+        Set<String> trusted = store.ask(tables -> packs.stream().flatMap(proved -> proved.signer().stream())
+                .map(signer -> signer.fingerprint().text()).filter(store.minutes(tables)::trusts)
+                .collect(Collectors.toSet()));
         List<Received> received = new ArrayList<>();
         Map<String, Sound> waiting = new LinkedHashMap<>();
         for (Proved proved : packs) {
@@ -122,7 +126,7 @@ final class Receiving {
             if (sound.isPresent()) {
                 waiting.put(sound.get().sha256(), sound.get());
             } else {
-                received.add(turned(proved));
+                received.add(turned(proved, trusted));
             }
         }
         received.addAll(keep(List.copyOf(waiting.values()), person));
@@ -130,11 +134,16 @@ final class Receiving {
     }
 
     /** One that is not sound, or whose device is not trusted. */
-    private Received turned(Proved proved) {
+    private Received turned(Proved proved, Set<String> trusted) {
         proved.laid().ifPresent(laid -> shelf.drop(laid.part()));
         return new Received.Turned(proved.file(), proved.defect().orElseGet(() -> proved.sound().map(sound ->
                 Defect.in(sound.shown(), "device-untrusted", sound.fingerprint())).orElseThrow()),
-                proved.sound().map(Sound::fingerprint));
+                proved.laid().map(Receiving::content), proved.laid().map(laid -> proved.signer().map(signer ->
+                Sender.of(signer, trusted)).orElse(Sender.UNPROVED)));
+    }
+
+    private static Received.Content content(PackShelf.Laid laid) {
+        return new Received.Content(laid.sha256(), laid.bytes());
     }
 
     /** Keeps packs that differ; where they can't all be kept together, each says for itself why. */
@@ -159,7 +168,8 @@ final class Receiving {
         if (failed.size() == 1) {
             Sound pack = failed.get(0);
             shelf.drop(pack.pack().laid().part());
-            received.add(new Received.Turned(pack.file(), defect, Optional.of(pack.fingerprint())));
+            received.add(new Received.Turned(pack.file(), defect, Optional.of(content(pack.pack().laid())),
+                    Optional.of(Sender.of(pack.signer(), Set.of(pack.fingerprint())))));
         }
         return 1;
     }

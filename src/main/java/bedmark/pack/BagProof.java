@@ -32,7 +32,7 @@ final class BagProof {
         }
         proof.checkDeclaration();
         proof.checkOxum();
-        return proof.signer();
+        return signer(content.kept());
     }
 
     private void checkDigests(String manifestName, String algorithm, boolean ofPayload) {
@@ -78,17 +78,23 @@ final class BagProof {
         }
     }
 
-    private DeviceIdentity signer() {
-        DeviceIdentity identity = DeviceIdentity.read(content.kept().get(Bag.KEY), Bag.KEY);
-        byte[] text = content.kept().get(Bag.SIGNATURE);
+    /**
+     * The device that signed the tag manifest.
+     *
+     * @param kept holds tag manifest, signature and key
+     * @throws Refused {@code pack-key-wrong}, {@code pack-signature-wrong}
+     */
+    static DeviceIdentity signer(Map<String, byte[]> kept) {
+        DeviceIdentity identity = DeviceIdentity.read(kept.get(Bag.KEY), Bag.KEY);
+        byte[] text = kept.get(Bag.SIGNATURE);
         byte[] signature;
         try {
-            signature = Base64.getDecoder().decode(text(Bag.SIGNATURE).strip());
+            signature = Base64.getDecoder().decode(new String(text, StandardCharsets.UTF_8).strip());
         } catch (IllegalArgumentException e) {
             throw new Refused(Defect.in(Bag.SIGNATURE, "pack-signature-wrong"), e);
         }
         if (!Arrays.equals(text, signatureText(signature))
-                || !identity.proves(content.kept().get(Bag.TAG_MANIFEST), signature)) {
+                || !identity.proves(kept.get(Bag.TAG_MANIFEST), signature)) {
             throw new Refused(Defect.in(Bag.SIGNATURE, "pack-signature-wrong"));
         }
         return identity;

@@ -55,6 +55,9 @@ class OfficeCommandsTest {
         assertTrue(refused.err().contains(Offices.fingerprint(folder.resolve("tablet"))), refused::err);
         assertEquals(1, refused.err().lines().count());
         assertEquals(2, office("receive", packs.toString(), "--trust", "nonsense").code());
+        Path cut = Files.write(folder.resolve("cut.zip"), new byte[] {'P', 'K', 3, 4, 5});
+        Result damaged = office("receive", cut.toString());
+        assertTrue(damaged.err().strip().endsWith("Nothing proves which tablet it is from."), damaged::err);
         Result received = received();
         assertEquals(0, received.code(), received::err);
         try (var files = Files.list(packs)) {

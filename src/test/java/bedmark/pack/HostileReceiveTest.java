@@ -2,19 +2,24 @@ package bedmark.pack;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.journal.Digest;
 import bedmark.office.OfficeOptions;
 import bedmark.office.OfficeStore;
 import bedmark.office.Received;
+import bedmark.office.Sender;
 import bedmark.survey.merge.Clash;
+import bedmark.words.Words;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Instant;
 import java.time.ZoneOffset;
+import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.AfterAll;
@@ -89,6 +94,54 @@ class HostileReceiveTest {
         assertInstanceOf(Received.AlreadyHere.class, receive("again", packs.sameIdWithOtherContent()));
         assertInstanceOf(Received.AlreadyHere.class, receive("again", packs.sound()));
         assertEquals(before, everyByte());
+    }
+
+    private static Sender senderOf(String hostile) throws IOException {
+        return sender(packs.all().get(hostile).bytes());
+    }
+
+    private static Sender sender(byte[] refused) throws IOException {
+        Sender sender = assertInstanceOf(Received.Turned.class, receive("refused", refused)).sender().orElseThrow();
+        Words.LANGUAGES.forEach(language ->
+                assertTrue(new Words(language).has("office.sender." + sender.code()), sender.code()));
+        return sender;
+    }
+
+    @Test
+    void whichTabletARefusedPackIsFromIsToldAsFarAsItsSignatureProvesIt() throws IOException {
+        for (String damaged : List.of("wrong digest", "bad CRC", "nested archive", "unknown unit", "future version")) {
+            assertEquals(new Sender(Optional.of("tablet 7"), Optional.of(packs.fingerprint()), true),
+                    senderOf(damaged), damaged);
+        }
+        for (String unproved : List.of("bad signature", "manifest made anew under an old signature", "junk before",
+                "weak digest alone")) {
+            assertEquals(Sender.UNPROVED, senderOf(unproved), unproved);
+        }
+        assertEquals("trusted-nameless", senderOf("trailing text").code());
+        assertEquals(Optional.empty(), assertInstanceOf(Received.Turned.class,
+                office.receive(folder.resolve("absent.zip"), PERSON)).sender());
+    }
+
+    @Test
+    void aNameThatWasNotSignedIsNotToldAndOneOfAnUntrustedKeyIsToldAsAClaim() throws IOException {
+        String bundle = HostilePacks.bundle(BagForge.PHOTO);
+        Map<String, byte[]> renamed = bag("tablet", bundle).files();
+        renamed.put("data/bundle.json", BagForge.text(bundle.replace("tablet 7", "tablet 8")));
+        assertEquals("trusted-nameless", sender(ZipForge.of(renamed).build()).code());
+        Map<String, byte[]> foreign = bag("stranger", bundle).files();
+        foreign.put("data/photos/a.png", Samples.png(2, 3));
+        Sender stranger = sender(ZipForge.of(foreign).build());
+        assertEquals("untrusted", stranger.code());
+        assertEquals(Optional.of("tablet 7"), stranger.name());
+        Map<String, byte[]> unfit = bag("stranger", bundle.replace("tablet 7", "t\\u0000")).files();
+        unfit.put("data/photos/a.png", Samples.png(2, 3));
+        assertEquals("untrusted-nameless", sender(ZipForge.of(unfit).build()).code());
+    }
+
+    private static BagForge bag(String key, String bundle) {
+        BagForge bag = new BagForge(DeviceKey.of(folder.resolve(key)));
+        bag.payload.put("data/bundle.json", BagForge.text(bundle));
+        return bag;
     }
 
     @Test

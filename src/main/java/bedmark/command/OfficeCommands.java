@@ -11,6 +11,7 @@ final class OfficeCommands {
         return new CommandLine(new Group.OfficeGroup())
                 .addSubcommand(new OfficeNameCommand(surroundings))
                 .addSubcommand(new OfficeReceiveCommand(surroundings))
+                .addSubcommand(new OfficeRefusedCommand(surroundings))
                 .addSubcommand(new OfficeRankCommand(surroundings))
                 .addSubcommand(new OfficeTrendCommand(surroundings))
                 .addSubcommand(new OfficeEnergyCommand(surroundings))

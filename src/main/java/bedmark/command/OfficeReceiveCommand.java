@@ -88,8 +88,8 @@ final class OfficeReceiveCommand implements Callable<Integer> {
 
     private void tell(OfficeStore store, Received received) {
         if (received instanceof Received.Turned turned) {
-            surroundings.err().println("bedmark: " + Wording.plain(turned.file() + ": "
-                    + surroundings.wording().sentence(turned.why()) + whence(turned)));
+            surroundings.err().println("bedmark: " + Wording.plain(turned.file() + ": ")
+                    + new RefusalText(surroundings.wording()).reason(turned));
             return;
         }
         if (received instanceof Received.Taken taken) {
@@ -102,12 +102,6 @@ final class OfficeReceiveCommand implements Callable<Integer> {
             say("", "office.receive.here", here.file(), here.device());
         }
         received.confirmed().ifPresent(receipt -> confirm(store, received.file(), receipt));
-    }
-
-    /** The question whether to trust a tablet names it already. */
-    private String whence(Received.Turned turned) {
-        return turned.sender().filter(sender -> !turned.untrusted()).map(sender -> " " + surroundings.words()
-                .text("office.sender." + sender.code(), sender.told())).orElse("");
     }
 
     private void tell(Clash clash) {

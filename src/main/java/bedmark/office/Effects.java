@@ -100,6 +100,7 @@ final class Effects implements Books.Effect {
 
     private List<Copy> take(OfficeTables tables, Entry entry, OfficeDeed.PackReceived pack, Intake intake) {
         tables.addPack(pack.sha256(), entry.sequence(), shelf.forTables(pack.sha256()));
+        tables.refusals().settle(List.of(pack.sha256()));
         tables.addRegister(intake.plant().register(), intake.plant().id(), intake.register());
         Optional<PlantRow> known = tables.plant(intake.plant().id());
         boolean newer = known.isEmpty() || !known.get().own() && later(intake.plant(), known.get());

@@ -5,6 +5,7 @@ import bedmark.document.Refused;
 import bedmark.index.office.DeedRow;
 import bedmark.index.office.OfficeBroken;
 import bedmark.index.office.OfficeTables;
+import bedmark.index.office.RefusalRow;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
 import bedmark.journal.Journal;
@@ -71,6 +72,7 @@ final class FolderBooks implements Books {
 
     private void open(boolean afresh) throws IOException {
         files.createFolder(index);
+        List<RefusalRow> refusals = afresh ? refusals() : List.of();
         if (afresh) {
             drop();
         }
@@ -90,10 +92,32 @@ final class FolderBooks implements Books {
         Journal opened = Journal.open(folder.resolve(JOURNAL), files, SEGMENT_BYTES, mark, options.progress(),
                 new CatchUp());
         journal = Optional.of(opened);
+        putBack(refusals);
         found.addAll(opened.found());
         if (rebuilt) {
             found.add(Defect.in(index.toString(), "office-tables-broken"));
         }
+    }
+
+    /** No journal holds them: they go over into tables that are made anew, as far as they can still be read. */
+    private List<RefusalRow> refusals() throws IOException {
+        if (beside || tables.isEmpty() && files.list(index).isEmpty()) {
+            return List.of();
+        }
+        try {
+            tables = Optional.of(tables.isPresent() ? tables() : OfficeTables.of(index));
+            return tables().whole(() -> tables().refusals().all());
+        } catch (OfficeBroken e) {
+            return List.of();
+        }
+    }
+
+    private void putBack(List<RefusalRow> refusals) {
+        tables().whole(() -> {
+            refusals.stream().filter(row -> row.sha256().filter(tables()::hasPack).isEmpty())
+                    .forEach(tables().refusals()::note);
+            return true;
+        });
     }
 
     /** Takes in the whole journal without a byte of it changed, to be compared; nothing can be kept then. */

@@ -43,6 +43,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.atomic.AtomicBoolean;
+import java.util.function.Consumer;
 import java.util.function.Function;
 
 /**
@@ -283,6 +284,22 @@ public final class OfficeStore implements AutoCloseable {
             });
         } catch (OfficeBroken e) {
             throw refused(e);
+        }
+    }
+
+    /**
+     * Writes a note that is no deed and that nothing depends on.
+     *
+     * @return whether it is written; whoever can't write it goes on without
+     */
+    boolean note(Consumer<OfficeTables> note) {
+        try {
+            return desk.call(() -> books.tables().whole(() -> {
+                note.accept(books.tables());
+                return true;
+            }));
+        } catch (OfficeBroken e) {
+            return false;
         }
     }
 

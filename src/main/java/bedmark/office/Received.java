@@ -52,8 +52,17 @@ public sealed interface Received {
      *
      * @param content nothing where the file could not be read to its end
      * @param sender  whom it is from; nothing where the file could not be read to its end
+     * @param kept    false where the refusal was to be noted for those who look in later, and could not be
      */
-    record Turned(Path file, Defect why, Optional<Content> content, Optional<Sender> sender) implements Received {
+    record Turned(Path file, Defect why, Optional<Content> content, Optional<Sender> sender, boolean kept)
+            implements Received {
+        Turned(Path file, Defect why, Optional<Content> content, Optional<Sender> sender) {
+            this(file, why, content, sender, true);
+        }
+
+        Turned unkept() {
+            return new Turned(file, why, content, sender, false);
+        }
 
         /** Of the key that signed it, where that is proved. */
         public Optional<String> fingerprint() {

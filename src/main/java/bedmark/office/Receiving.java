@@ -130,7 +130,7 @@ final class Receiving {
             }
         }
         received.addAll(keep(List.copyOf(waiting.values()), person));
-        return received;
+        return new Refusals(store, options.clock()).noted(received);
     }
 
     /** One that is not sound, or whose device is not trusted. */

@@ -102,8 +102,14 @@ public record Wording(Words words, UnitSystem units, Map<Unit, Unit> liked) {
         return QuantityFormat.with(number, Unit.PERCENT, symbol(Unit.PERCENT));
     }
 
-    /** A defect in one sentence; a detail that is a code of its own is put in words ({@code code.detail}). */
+    /**
+     * A defect in one sentence; a detail that is a code of its own is put in words ({@code code.detail}). A newer
+     * program may have written one down that this one has no words for.
+     */
     public String sentence(Defect defect) {
+        if (!words.has("defect." + defect.code())) {
+            return sentence(Defect.in(defect.where(), "unworded", defect.code()));
+        }
         Object[] arguments = new Object[defect.details().size() + 1];
         arguments[0] = defect.where().isEmpty() ? "/" : defect.where();
         for (int i = 0; i < defect.details().size(); i++) {

@@ -9,11 +9,15 @@ import bedmark.json.JsonReader;
 import bedmark.office.Offices;
 import bedmark.survey.Bundle;
 import java.io.IOException;
+import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -66,6 +70,35 @@ class OfficeCommandsTest {
         Result again = office("receive", packs.toString());
         assertEquals(0, again.code());
         assertTrue(again.out().contains("received before"), again::out);
+    }
+
+    @Test
+    void whatWasRefusedIsListedUntilItIsIn() throws IOException {
+        assertEquals("No refused pack waits.", office("refused").out().strip());
+        assertEquals("", office("refused", "--json").out());
+        byte[] changed = Files.readAllBytes(packs.resolve("a.zip"));
+        Matcher photo = Pattern.compile("PK\3\4.{26}data/photos/", Pattern.DOTALL)
+                .matcher(new String(changed, StandardCharsets.ISO_8859_1));
+        assertTrue(photo.find());
+        changed[photo.end() + 200] ^= 1;
+        Path damaged = Files.write(packs.resolve("c.zip"), changed);
+        assertEquals(3, office("receive", packs.toString()).code());
+        assertEquals(3, office("receive", damaged.toString()).code());
+        Result text = office("refused");
+        assertEquals(0, text.code(), text::err);
+        assertEquals(3, text.out().lines().count(), text::out);
+        assertTrue(text.out().lines().anyMatch(line -> line.contains(damaged + ": ") && line.contains("Tablet 3")
+                && line.contains("a key that this office does not trust")), text::out);
+        assertEquals(0, office("receive", packs.resolve("a.zip").toString(), packs.resolve("b.zip").toString(), "--trust",
+                Offices.fingerprint(folder.resolve("tablet"))).code());
+        Branch left = JsonReader.read(office("refused", "--json").out().getBytes(StandardCharsets.UTF_8)).root();
+        assertEquals(damaged.toString(), left.text("file").orElseThrow());
+        assertEquals("trusted", left.text("sender").orElseThrow());
+        assertEquals("Tablet 3", left.text("tablet").orElseThrow());
+        assertEquals(Optional.of(new BigDecimal(changed.length)), left.number("bytes"));
+        for (String key : List.of("sha256", "fingerprint", "code", "reason", "firstAt", "lastAt")) {
+            assertTrue(left.text(key).isPresent(), key);
+        }
     }
 
     @Test
@@ -159,7 +192,7 @@ class OfficeCommandsTest {
 
     @Test
     void everyCommandOfTheOfficeHasHelp() {
-        for (String command : List.of("receive", "rank", "trend", "energy", "accept", "action", "settle", "export",
+        for (String command : List.of("receive", "refused", "rank", "trend", "energy", "accept", "action", "settle", "export",
                 "import-register", "export-register", "round")) {
             Result help = Terminal.run("office", command, "--help");
             assertEquals(0, help.code());

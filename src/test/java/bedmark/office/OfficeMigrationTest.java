@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import bedmark.index.office.OfficeTables;
 import bedmark.index.office.PackedZone;
+import bedmark.index.office.RefusalRow;
 import bedmark.index.office.Standing;
 import bedmark.index.office.Verdict;
 import bedmark.index.office.ZoneNames;
@@ -124,5 +125,20 @@ class OfficeMigrationTest {
         assertEquals(OptionalLong.empty(), copies.get("ab12").came());
         assertEquals(OptionalLong.of(1_749_981_600_000L), copies.get("ef56").came(), "dated ahead of when it came");
         assertEquals(List.of(first), tables.datedAhead(List.of(first, second, third)));
+        assertEquals(List.of(), tables.refusals().all());
+        RefusalRow refused = new RefusalRow("ab12", "/in/a.zip", Optional.of("ab12"), OptionalLong.of(3),
+                Optional.empty(), Optional.empty(), "{}", 1, 1);
+        tables.whole(() -> {
+            tables.refusals().note(refused);
+            tables.refusals().note(refused);
+            tables.refusals().thin(0);
+            return true;
+        });
+        assertEquals(List.of(refused), tables.refusals().all());
+        tables.whole(() -> {
+            tables.refusals().settle(List.of("ab12"));
+            return true;
+        });
+        assertEquals(List.of(), tables.refusals().all());
     }
 }

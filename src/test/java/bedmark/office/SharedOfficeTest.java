@@ -117,6 +117,7 @@ class SharedOfficeTest {
             assertEquals(files(folder.resolve("export-alone")), files(folder.resolve("export-shared")));
             assertEquals(report(alone, folder.resolve("report-alone")), report(shared, folder.resolve("report-shared")));
             desksThatChangeOneRegisterDoNotReplaceEachOther(shared);
+            whatOneDeskRefusedAnotherSees(shared);
         }
     }
 
@@ -139,6 +140,15 @@ class SharedOfficeTest {
         assertEquals(Collections.nCopies(DESKS - 1, "register-changed-since"), refused);
         assertEquals(before.branch("plant").orElseThrow().branches("materials").size() + 1,
                 shared.registers().get(plant).materials().size());
+    }
+
+    private void whatOneDeskRefusedAnotherSees(OfficeStore shared) throws IOException {
+        Path broken = Files.write(folder.resolve("broken.zip"), new byte[] {1, 2, 3});
+        try (OfficeStore second = desk(1)) {
+            Received refused = second.receive(broken, "Desk 1");
+            assertEquals(List.of(refused), new Refusals(shared, Offices.NOW).open().stream().map(Refusal::turned)
+                    .toList());
+        }
     }
 
     /** Adds a material of a desk's own; why it was refused, where it was. */

@@ -31,7 +31,7 @@ import org.junit.jupiter.api.io.TempDir;
 
 /**
  * Every hostile pack of {@link HostilePacks}, sent to an office that trusts its sender: each is turned away for its one
- * reason, and not a byte of the store differs afterwards.
+ * reason, and not a byte of what the store keeps differs afterwards; its tables note the refusal.
  */
 class HostileReceiveTest {
     private static final Clock NOW = Clock.fixed(Instant.parse("2026-10-01T08:00:00Z"), ZoneOffset.UTC);
@@ -63,7 +63,8 @@ class HostileReceiveTest {
     private static Map<String, String> everyByte() throws IOException {
         Map<String, String> files = new TreeMap<>();
         try (Stream<Path> all = Files.walk(folder.resolve("office"))) {
-            for (Path file : all.filter(Files::isRegularFile).toList()) {
+            for (Path file : all.filter(Files::isRegularFile).filter(one -> !one.getParent().endsWith("index"))
+                    .toList()) {
                 files.put(file.toString(), Digest.of(Files.readAllBytes(file)).hex());
             }
         }

@@ -1,6 +1,7 @@
 package bedmark.wording;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Defect;
 import bedmark.quantity.UnitSystem;
@@ -24,6 +25,12 @@ class WordingTest {
     @CsvSource({"0, 0 %", "0.004, < 1 %", "0.996, 100 %", "1, 100 %", "1.26, 126 %"})
     void shareIsRounded(double share, String told) {
         assertEquals(told, ENGLISH.percent(share).replace('\u00a0', ' ').replace('\u202f', ' '));
+    }
+
+    @Test
+    void aReasonThatANewerProgramWroteDownIsToldWithoutItsWords() {
+        String told = ENGLISH.sentence(Defect.in("a.zip", "pack-of-tomorrow", "7"));
+        assertTrue(told.contains("pack-of-tomorrow") && told.contains("a.zip"), told);
     }
 
     @Test

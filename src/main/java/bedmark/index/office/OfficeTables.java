@@ -34,11 +34,13 @@ public final class OfficeTables implements AutoCloseable {
 
     private final Link link;
     private final ZoneTable zones;
+    private final RefusalTable refusals;
     private final boolean server;
 
     private OfficeTables(Link link, boolean server) {
         this.link = link;
         this.zones = new ZoneTable(link);
+        this.refusals = new RefusalTable(link);
         this.server = server;
     }
 
@@ -264,6 +266,11 @@ public final class OfficeTables implements AutoCloseable {
     /** Makes rows for those of the zones that have none: today's register does not name them. */
     public void addUnnamed(Collection<ZoneId> unnamed, String plantName) {
         zones.addUnnamed(unnamed, plantName);
+    }
+
+    /** The packs that were refused. Nothing is proved by them, and whatever else lies here can be made without them. */
+    public RefusalTable refusals() {
+        return refusals;
     }
 
     /** Says what counts of zones; they wait to be judged where there is something to judge. */

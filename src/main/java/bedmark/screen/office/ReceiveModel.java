@@ -5,6 +5,8 @@ import bedmark.document.Refused;
 import bedmark.journal.Progress;
 import bedmark.office.PackFolder;
 import bedmark.office.Received;
+import bedmark.office.Refusal;
+import bedmark.office.Refusals;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.OfficeDeed;
@@ -30,6 +32,7 @@ public final class ReceiveModel {
     private final OfficeDesk desk;
     private final ObservableList<Received> received = FXCollections.observableArrayList();
     private final ReadOnlyObjectWrapper<List<Earlier>> earlier = new ReadOnlyObjectWrapper<>(List.of());
+    private final ReadOnlyObjectWrapper<List<Refusal>> refused = new ReadOnlyObjectWrapper<>(List.of());
     private final ReadOnlyObjectWrapper<Optional<Path>> watched = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ScheduledExecutorService watch = Executors.newSingleThreadScheduledExecutor(run -> {
         Thread thread = new Thread(run, "office-watch");
@@ -46,8 +49,8 @@ public final class ReceiveModel {
     public record Earlier(String file, String device, OffsetDateTime at) {
     }
 
-    /** What came of packs, and why the first receipt could not be written that was not. */
-    private record Came(List<Received> packs, Optional<Defect> unwritten) {
+    /** What came of packs, why the first receipt could not be written that was not, and what is still refused. */
+    private record Came(List<Received> packs, Optional<Defect> unwritten, List<Refusal> refused) {
     }
 
     /** A model at a desk; what came before it is told apart from what comes now. */
@@ -69,6 +72,20 @@ public final class ReceiveModel {
     /** Looks up what came before. */
     void lookBack() {
         desk.ask(progress -> earlier(desk.store().packs()), earlier::set);
+    }
+
+    /** What was refused, whenever that was, and is not in; the last refused first. */
+    public ReadOnlyObjectProperty<List<Refusal>> refusedProperty() {
+        return refused.getReadOnlyProperty();
+    }
+
+    /** Looks up what is still refused. */
+    void lookAtRefused() {
+        desk.ask(progress -> refusals(), refused::set);
+    }
+
+    private List<Refusal> refusals() {
+        return new Refusals(desk.store(), desk.clock()).open();
     }
 
     private static List<Earlier> earlier(List<Entry> packs) {
@@ -151,11 +168,12 @@ public final class ReceiveModel {
                 unwritten.add(e.defect());
             }
         }));
-        return new Came(packs, unwritten.stream().findFirst());
+        return new Came(packs, unwritten.stream().findFirst(), refusals());
     }
 
     private void show(Came came) {
         came.packs().forEach(one -> received.add(0, one));
+        refused.set(came.refused());
         came.unwritten().ifPresent(desk::tell);
     }
 

@@ -1,6 +1,7 @@
 package bedmark.screen.office;
 
 import bedmark.office.Received;
+import bedmark.office.Refusal;
 import bedmark.screen.Listening;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Plate;
@@ -9,8 +10,12 @@ import bedmark.screen.part.Weight;
 import bedmark.wording.Wording;
 import java.io.File;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import javafx.collections.ListChangeListener;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
@@ -24,6 +29,8 @@ import javafx.scene.layout.VBox;
 
 /** Where packs come in: dropped, chosen, or put into a watched folder; below, what came of each. */
 final class ReceiveView extends VBox {
+    private static final int REFUSED_SHOWN = 100;
+
     private final ReceiveModel model;
     private final Wording wording;
     private final VBox rows = new VBox();
@@ -41,6 +48,8 @@ final class ReceiveView extends VBox {
         model.received().addListener(shown);
         listening.onEnd(() -> model.received().removeListener(shown));
         listening.to(model.earlierProperty(), earlier -> show());
+        listening.to(model.refusedProperty(), refused -> show());
+        model.lookAtRefused();
     }
 
     private Node dropPlace(OfficeDesk desk, Listening listening) {
@@ -93,13 +102,35 @@ final class ReceiveView extends VBox {
             none.getStyleClass().add("soft");
             rows.getChildren().add(none);
         }
-        List<ReceiveModel.Earlier> earlier = model.earlierProperty().get();
-        if (!earlier.isEmpty()) {
-            Label title = new Label(wording.text("office.receive.earlier"));
-            title.getStyleClass().add("section-title");
-            rows.getChildren().add(title);
-            earlier.forEach(one -> rows.getChildren().add(row(one)));
+        section("office.receive.still-refused", stillRefused());
+        section("office.receive.earlier", model.earlierProperty().get().stream().map(this::row).toList());
+    }
+
+    private void section(String title, List<? extends Node> under) {
+        if (!under.isEmpty()) {
+            Label label = new Label(wording.text(title));
+            label.getStyleClass().add("section-title");
+            rows.getChildren().add(label);
+            rows.getChildren().addAll(under);
         }
+    }
+
+    /** Those that are told of above stand there with the same words. */
+    private List<Node> stillRefused() {
+        Set<Optional<Received.Content>> told = model.received().stream().flatMap(one ->
+                one instanceof Received.Turned turned ? Stream.of(turned.content()) : Stream.empty())
+                .filter(Optional::isPresent).collect(Collectors.toSet());
+        List<Refusal> refusals = model.refusedProperty().get().stream()
+                .filter(one -> !told.contains(one.turned().content())).toList();
+        List<Node> shown = new ArrayList<>();
+        refusals.stream().limit(REFUSED_SHOWN).forEach(one ->
+                shown.add(new ReceivedRow(wording, one, model::trust)));
+        if (refusals.size() > REFUSED_SHOWN) {
+            Label more = Texts.wrapped(wording.text("office.receive.more-refused", refusals.size() - REFUSED_SHOWN));
+            more.getStyleClass().add("soft");
+            shown.add(more);
+        }
+        return shown;
     }
 
     private Node row(ReceiveModel.Earlier earlier) {

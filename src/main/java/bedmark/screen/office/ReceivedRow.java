@@ -1,6 +1,7 @@
 package bedmark.screen.office;
 
 import bedmark.office.Received;
+import bedmark.office.Refusal;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Plate;
 import bedmark.screen.part.Texts;
@@ -17,13 +18,28 @@ import javafx.scene.layout.VBox;
 /** What came of one pack: whether it is in, in words; of an unknown tablet the question whether to trust it. */
 public final class ReceivedRow extends HBox {
     private final Wording wording;
+    private final VBox words = new VBox();
+
+    /** A pack that was refused before, with the time. */
+    ReceivedRow(Wording wording, Refusal refusal, Consumer<Received.Turned> trust) {
+        this(wording, refusal.turned(), trust);
+        Label when = Texts.wrapped(Wording.plain(refusal.first().equals(refusal.last())
+                ? wording.text("office.receive.turned", wording.moment(refusal.last()), folder(refusal))
+                : wording.text("office.receive.turned-again", wording.moment(refusal.last()), folder(refusal),
+                        wording.moment(refusal.first()))));
+        when.getStyleClass().add("soft");
+        words.getChildren().add(when);
+    }
+
+    private static String folder(Refusal refusal) {
+        return String.valueOf(refusal.turned().file().getParent());
+    }
 
     /** @param trust told that the person compared the fingerprint of a pack's device */
     public ReceivedRow(Wording wording, Received received, Consumer<Received.Turned> trust) {
         this.wording = wording;
         getStyleClass().add("received-row");
         setAlignment(Pos.CENTER_LEFT);
-        VBox words = new VBox();
         words.setMinWidth(0);
         HBox.setHgrow(words, Priority.ALWAYS);
         Label file = Texts.wrapped(received.file().getFileName().toString());
@@ -31,7 +47,7 @@ public final class ReceivedRow extends HBox {
         words.getChildren().add(file);
         getChildren().addAll(plate(received), words);
         if (received instanceof Received.Taken taken) {
-            taken(taken, words);
+            taken(taken);
         } else if (received instanceof Received.AlreadyHere here) {
             words.getChildren().add(Texts.wrapped(wording.text("office.receive.known", here.device())));
         } else if (received instanceof Received.Turned turned) {
@@ -39,6 +55,9 @@ public final class ReceivedRow extends HBox {
             // The question whether to trust a tablet names it already.
             turned.sender().filter(sender -> !turned.untrusted()).ifPresent(sender -> words.getChildren()
                     .add(Texts.wrapped(Wording.plain(wording.text("office.sender." + sender.code(), sender.told())))));
+            if (!turned.kept()) {
+                words.getChildren().add(Texts.trouble(wording.text("office.receive.unkept")));
+            }
             if (turned.untrusted()) {
                 ActionButton button = new ActionButton(Weight.PRIMARY, wording.text("office.receive.trust"), () ->
                         trust.accept(turned));
@@ -48,7 +67,7 @@ public final class ReceivedRow extends HBox {
         }
     }
 
-    private void taken(Received.Taken taken, VBox words) {
+    private void taken(Received.Taken taken) {
         words.getChildren().add(Texts.wrapped(wording.text("office.receive.from", taken.device(), taken.fresh(),
                 taken.known())));
         taken.clashes().forEach(clash -> words.getChildren().add(Texts.trouble(clash(clash))));

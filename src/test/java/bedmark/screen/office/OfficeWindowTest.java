@@ -5,7 +5,10 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
+import bedmark.journal.Progress;
 import bedmark.office.Answered;
+import bedmark.office.OfficeOptions;
+import bedmark.office.OfficeStore;
 import bedmark.office.Offices;
 import bedmark.office.RankedZone;
 import bedmark.quantity.Quantity;
@@ -73,6 +76,28 @@ class OfficeWindowTest {
             try (Stream<Path> files = Files.list(packs)) {
                 assertEquals(3, files.filter(file -> file.toString().endsWith(".receipt.json")).count());
             }
+        }
+    }
+
+    @Test
+    void whatWasRefusedAtNightIsShownInTheMorningAndTrustedThere() throws Exception {
+        Path cut = Files.write(folder.resolve("cut.zip"), new byte[] {'P', 'K', 3, 4, 5});
+        try (OfficeStore store = OfficeStore.open(folder.resolve("office"), OfficeOptions.of(Offices.NOW))) {
+            store.receive(List.of(packs.resolve("round-under-way.zip"), cut), "night", Progress.NONE);
+        }
+        try (OfficeWindow window = window(1280, 800)) {
+            window.click("room-receive");
+            String words = window.words();
+            assertTrue(words.contains("Refused, and not in yet"), words);
+            assertTrue(words.contains("cut.zip") && words.contains("Nothing proves which tablet it is from."), words);
+            assertTrue(words.contains("Refused 1 Oct 2026, 08:00, from " + packs), words);
+            window.click("language");
+            window.until(() -> window.words().contains("Nada prueba de qué tableta es."));
+            assertTrue(window.words().contains("aún no confía"), window.words());
+            window.click("trust");
+            window.until(() -> !window.desk().store().packs().isEmpty());
+            assertFalse(window.words().contains("aún no confía"), window.words());
+            assertTrue(window.words().contains("cut.zip"), window.words());
         }
     }
 

@@ -2,6 +2,7 @@ package bedmark.wording;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.words.Words;
 import java.time.DateTimeException;
 import java.time.LocalDate;
 import java.time.Month;
@@ -13,7 +14,7 @@ import java.util.regex.Pattern;
 import java.util.stream.Stream;
 
 /**
- * A day as a person types it: {@code 2027-01-31}, with the month in letters of their language, or in figures where
+ * A day as a person types it: {@code 2027-01-31}, with the month in letters, or in figures where
  * these are read one way only. With strokes the day comes first in Spanish; in English half of the readers take it for
  * the month, so that it is not read at all.
  */
@@ -69,10 +70,15 @@ public final class TypedDay {
                 .map(figures -> LocalDate.of(number(figures, 3), number(figures, 2), number(figures, 1)));
     }
 
-    /** A month by its name or the start of it. */
+    /** A month by its name or the start of it. What was typed before the words were changed is read after it too. */
     private Optional<Month> month(String letters) {
-        return Stream.of(Month.values()).filter(month -> month.getDisplayName(TextStyle.FULL, locale())
-                .toLowerCase(locale()).startsWith(letters.toLowerCase(locale()))).findFirst();
+        return Stream.concat(Stream.of(locale()), Words.LANGUAGES.stream())
+                .flatMap(language -> month(letters, language).stream()).findFirst();
+    }
+
+    private static Optional<Month> month(String letters, Locale language) {
+        return Stream.of(Month.values()).filter(month -> month.getDisplayName(TextStyle.FULL, language)
+                .toLowerCase(language).startsWith(letters.toLowerCase(language))).findFirst();
     }
 
     private Locale locale() {

@@ -117,10 +117,8 @@ public final class Shell implements Navigator {
                 || !before.chosenUnits().equals(now.chosenUnits());
         boolean looks = before.lighting() != now.lighting() || before.gloves() != now.gloves()
                 || before.dpi() != now.dpi() || before.text() != now.text();
-        if (looks) {
-            dress();
-        }
         if (words || looks) {
+            dress();
             show(current);
         }
     }
@@ -147,6 +145,7 @@ public final class Shell implements Navigator {
 
     private void dress() {
         light = wantedLight();
+        ToolkitLanguage.set(workplace.preferences().locale());
         Theme.apply(scene, light, density(workplace.preferences(), scale));
     }
 

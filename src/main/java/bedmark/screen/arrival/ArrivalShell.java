@@ -1,6 +1,7 @@
 package bedmark.screen.arrival;
 
 import bedmark.screen.Preferences;
+import bedmark.screen.ToolkitLanguage;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Density;
@@ -61,6 +62,7 @@ public final class ArrivalShell {
 
     private void show() {
         Preferences preferences = model.preferences();
+        ToolkitLanguage.set(preferences.locale());
         Theme.applyOffice(scene, preferences.lighting().at(LocalTime.now(model.clock())), density(preferences));
         view.ifPresent(ArrivalView::left);
         ArrivalView shown = new ArrivalView(model, close, toOffice, 

@@ -2,6 +2,7 @@ package bedmark.screen.office;
 
 import bedmark.screen.Listening;
 import bedmark.screen.Preferences;
+import bedmark.screen.ToolkitLanguage;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Texts;
 import bedmark.screen.part.TopBar;
@@ -81,6 +82,7 @@ public final class OfficeShell {
 
     private void dress() {
         Preferences preferences = desk.preferences();
+        ToolkitLanguage.set(preferences.locale());
         Theme.applyOffice(scene, preferences.night() ? Light.NIGHT : Light.DAY,
                 new Density(preferences.dpi(), Hand.BARE));
     }

@@ -21,14 +21,17 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.scene.Node;
 import javafx.scene.control.ComboBox;
+import javafx.scene.control.DatePicker;
 import javafx.scene.control.ListView;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
 import javafx.scene.control.TextField;
+import javafx.scene.control.skin.DatePickerSkin;
 import javafx.scene.input.KeyCode;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -236,6 +239,42 @@ class OfficeWindowTest {
             assertEquals("", ((TextField) window.node("action-text")).getText());
             assertEquals("", ((TextField) window.node("action-due")).getText());
         }
+    }
+
+    @Test
+    void theCalendarSpeaksTheLanguageOfTheProgramAndNotThatOfTheMachine() throws Exception {
+        Locale machine = Locale.getDefault();
+        Locale.setDefault(Locale.forLanguageTag("ar-EG-u-nu-arab"));
+        try (OfficeWindow window = window(1280, 800)) {
+            worst(window);
+            window.click("until");
+            window.type("2027-01-31");
+            List<String> english = calendar(window);
+            assertTrue(english.containsAll(List.of("January", "2027", "31")), english::toString);
+            assertTrue(english.indexOf("Mon") < english.indexOf("Tue"), english::toString);
+            assertTrue(english.indexOf("Mon") < english.indexOf("Sun"), english::toString);
+            window.click("language");
+            List<String> spanish = calendar(window);
+            assertTrue(spanish.containsAll(List.of("Enero", "2027", "31")), spanish::toString);
+            assertTrue(spanish.indexOf("Lun") < spanish.indexOf("Dom"), spanish::toString);
+        } finally {
+            Locale.setDefault(machine);
+        }
+    }
+
+    /** What is written in the calendar at the field for the end of an acceptance. */
+    private static List<String> calendar(OfficeWindow window) throws Exception {
+        DatePicker picker = (DatePicker) window.node("until-calendar");
+        Glass.on(() -> {
+            picker.show();
+            return null;
+        });
+        window.settle();
+        return Glass.on(() -> {
+            List<String> words = Glass.words(((DatePickerSkin) picker.getSkin()).getPopupContent()).lines().toList();
+            picker.hide();
+            return words;
+        });
     }
 
     @Test

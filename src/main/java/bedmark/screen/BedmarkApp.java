@@ -177,6 +177,7 @@ public final class BedmarkApp extends Application {
 
     /** Shows a page that stands without a store as the person likes the screen. */
     static void show(Stage stage, LonePage page, Preferences preferences, Clock clock) {
+        ToolkitLanguage.set(preferences.locale());
         Scene scene = new Scene(page, WIDTH, HEIGHT);
         Theme.apply(scene, preferences.lighting().at(LocalTime.now(clock)), Shell.density(preferences));
         stage.setScene(scene);

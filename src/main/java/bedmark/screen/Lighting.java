@@ -10,7 +10,7 @@ import java.util.stream.Stream;
 public enum Lighting {
     DAY,
     NIGHT,
-    /** Night from seven in the evening to six in the morning, by the tablet's own clock. */
+    /** Night from seven in the evening to six in the morning, by the clock of the device. */
     CLOCK;
 
     private static final LocalTime DUSK = LocalTime.of(19, 0);
@@ -19,6 +19,11 @@ public enum Lighting {
     /** The word used in settings. */
     public String code() {
         return name().toLowerCase(Locale.ROOT);
+    }
+
+    /** The one that follows where they are gone through one after the other. */
+    Lighting next() {
+        return values()[(ordinal() + 1) % values().length];
     }
 
     static Optional<Lighting> ofCode(String code) {

@@ -19,34 +19,25 @@ import bedmark.screen.store.StoreModel;
 import bedmark.screen.store.StoreView;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Hand;
-import bedmark.screen.theme.Light;
 import bedmark.screen.theme.Theme;
 import bedmark.screen.zone.ZoneModel;
 import bedmark.screen.zone.ZoneSetting;
 import bedmark.screen.zone.ZoneView;
 import bedmark.survey.SurveyHistory;
-import java.time.LocalTime;
 import java.util.Optional;
 import java.util.function.Supplier;
-import javafx.animation.Animation;
-import javafx.animation.KeyFrame;
-import javafx.animation.Timeline;
 import javafx.application.Platform;
 import javafx.scene.Scene;
 import javafx.scene.layout.BorderPane;
-import javafx.util.Duration;
 
 /** The one window: holds the screen that is shown, dresses it, and leads from one to the next. */
 public final class Shell implements Navigator {
-    private static final Duration CLOCK_TICK = Duration.seconds(20);
-
     private final Workplace workplace;
     private final BorderPane root;
     private final Scene scene;
-    private final Timeline clock = new Timeline(new KeyFrame(CLOCK_TICK, event -> followClock()));
+    private final ClockedLight light;
     private Supplier<Screen> current;
     private Screen screen;
-    private Light light = Light.DAY;
     private double scale = 1;
     private Optional<RoundModel> walked = Optional.empty();
     private boolean failing;
@@ -62,6 +53,8 @@ public final class Shell implements Navigator {
         this.workplace = workplace;
         this.scene = first.scene();
         this.root = first.root();
+        this.light = new ClockedLight(workplace.clock(), () -> workplace.preferences().lighting(), now ->
+                Theme.apply(scene, now, density(workplace.preferences(), scale)));
         dress();
         workplace.preferencesProperty().addListener((property, before, now) -> preferencesChanged(before, now));
         scene.widthProperty().addListener((property, before, now) -> turn());
@@ -72,8 +65,6 @@ public final class Shell implements Navigator {
                 scaled(now.getOutputScaleX());
             }
         });
-        clock.setCycleCount(Animation.INDEFINITE);
-        clock.play();
         begin(goingOn);
     }
 
@@ -123,17 +114,6 @@ public final class Shell implements Navigator {
         }
     }
 
-    private Light wantedLight() {
-        return workplace.preferences().lighting().at(LocalTime.now(workplace.clock()));
-    }
-
-    /** Day and night change while a screen is worked on: it keeps its focus and what is typed, only colours change. */
-    void followClock() {
-        if (wantedLight() != light) {
-            dress();
-        }
-    }
-
     /** The window came onto a screen whose dots are gathered into larger logical ones. */
     private void scaled(double outputScale) {
         if (outputScale > 0 && outputScale != scale) {
@@ -144,9 +124,8 @@ public final class Shell implements Navigator {
     }
 
     private void dress() {
-        light = wantedLight();
         ToolkitLanguage.set(workplace.preferences().locale());
-        Theme.apply(scene, light, density(workplace.preferences(), scale));
+        light.dress();
     }
 
     static Density density(Preferences preferences) {
@@ -244,7 +223,7 @@ public final class Shell implements Navigator {
     /** Saves what is typed and lets go of the screen. */
     public void close() {
         closed = true;
-        clock.stop();
+        light.stop();
         screen.left();
     }
 

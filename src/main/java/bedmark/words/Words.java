@@ -31,6 +31,12 @@ public final class Words {
         this.locale = locale;
     }
 
+    /** A language's own name for itself, with a capital as at the start of a line. */
+    public static String nameOf(Locale language) {
+        String name = language.getDisplayLanguage(language);
+        return name.substring(0, 1).toUpperCase(language) + name.substring(1);
+    }
+
     public Locale locale() {
         return locale;
     }

@@ -1,15 +1,12 @@
 package bedmark.screen.arrival;
 
+import bedmark.screen.ClockedLight;
+import bedmark.screen.LookButtons;
 import bedmark.screen.Preferences;
 import bedmark.screen.ToolkitLanguage;
-import bedmark.screen.part.ActionButton;
-import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Hand;
-import bedmark.screen.theme.Icon;
 import bedmark.screen.theme.Theme;
-import java.time.LocalTime;
-import java.util.Locale;
 import java.util.Optional;
 import javafx.scene.Scene;
 import javafx.scene.layout.BorderPane;
@@ -22,6 +19,7 @@ public final class ArrivalShell {
     private final Runnable toOffice;
     private final BorderPane root = new BorderPane();
     private final Scene scene;
+    private final ClockedLight light;
     private Optional<ArrivalView> view = Optional.empty();
 
     /**
@@ -35,6 +33,8 @@ public final class ArrivalShell {
         this.close = close;
         this.toOffice = toOffice;
         this.scene = new Scene(root, width, height);
+        this.light = new ClockedLight(model.clock(), () -> model.preferences().lighting(), now ->
+                Theme.applyOffice(scene, now, density(model.preferences())));
         root.getStyleClass().add("arrival");
         model.preferencesProperty().addListener((property, before, now) -> {
             if (!before.locale().equals(now.locale()) || before.lighting() != now.lighting()
@@ -61,12 +61,10 @@ public final class ArrivalShell {
     }
 
     private void show() {
-        Preferences preferences = model.preferences();
-        ToolkitLanguage.set(preferences.locale());
-        Theme.applyOffice(scene, preferences.lighting().at(LocalTime.now(model.clock())), density(preferences));
+        ToolkitLanguage.set(model.preferences().locale());
+        light.dress();
         view.ifPresent(ArrivalView::left);
-        ArrivalView shown = new ArrivalView(model, close, toOffice, 
-                new HBox(language(preferences), light(preferences)));
+        ArrivalView shown = new ArrivalView(model, close, toOffice, buttons());
         view = Optional.of(shown);
         turn();
         root.setTop(shown.head());
@@ -74,24 +72,11 @@ public final class ArrivalShell {
         root.setBottom(shown.foot());
     }
 
-    private ActionButton light(Preferences preferences) {
-        boolean night = preferences.night();
-        ActionButton button = ActionButton.of(night ? Icon.SUN : Icon.MOON, Weight.PLAIN,
-                model.wording().text(night ? "screen.start.light.day" : "screen.start.light.night"), () ->
-                        model.preferencesProperty().set(model.preferences().withNight(!night)));
-        button.setId("light");
-        button.getStyleClass().add("secondary-target");
-        return button;
-    }
-
-    private ActionButton language(Preferences preferences) {
-        boolean spanish = preferences.locale().getLanguage().equals("es");
-        ActionButton button = new ActionButton(Weight.PLAIN, spanish ? "English" : "Español", () ->
-                model.preferencesProperty().set(model.preferences()
-                        .withLocale(Locale.forLanguageTag(spanish ? "en" : "es"))));
-        button.setId("language");
-        button.getStyleClass().add("secondary-target");
-        return button;
+    private HBox buttons() {
+        HBox buttons = new HBox(LookButtons.language(model.preferencesProperty()),
+                LookButtons.light(model.preferencesProperty()));
+        buttons.getChildren().forEach(button -> button.getStyleClass().add("secondary-target"));
+        return buttons;
     }
 
     private void turn() {
@@ -100,6 +85,7 @@ public final class ArrivalShell {
 
     /** Lets go of the screen and of what it shows. */
     public void close() {
+        light.stop();
         view.ifPresent(ArrivalView::left);
         model.close();
     }

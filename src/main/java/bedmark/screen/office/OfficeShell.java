@@ -1,7 +1,8 @@
 package bedmark.screen.office;
 
+import bedmark.screen.ClockedLight;
 import bedmark.screen.Listening;
-import bedmark.screen.Preferences;
+import bedmark.screen.LookButtons;
 import bedmark.screen.ToolkitLanguage;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Texts;
@@ -9,12 +10,9 @@ import bedmark.screen.part.TopBar;
 import bedmark.screen.part.Weight;
 import bedmark.screen.theme.Density;
 import bedmark.screen.theme.Hand;
-import bedmark.screen.theme.Icon;
-import bedmark.screen.theme.Light;
 import bedmark.screen.theme.Theme;
 import bedmark.survey.merge.ZoneId;
 import bedmark.wording.Wording;
-import java.util.Locale;
 import java.util.Optional;
 import javafx.application.Platform;
 import javafx.geometry.Pos;
@@ -50,7 +48,7 @@ public final class OfficeShell {
     private final OfficeDesk desk;
     private final BorderPane root = new BorderPane();
     private final Scene scene;
-    private final Listening listening = new Listening();
+    private final ClockedLight light;
     private final ReceiveModel receive;
     private final WorstModel worst;
     private RegisterModel register;
@@ -65,6 +63,8 @@ public final class OfficeShell {
         receive.lookBack();
         this.worst = new WorstModel(desk);
         this.scene = new Scene(root, width, height);
+        this.light = new ClockedLight(desk.clock(), () -> desk.preferences().lighting(), now ->
+                Theme.applyOffice(scene, now, new Density(desk.preferences().dpi(), Hand.BARE)));
         root.getStyleClass().add("office");
         dress();
         desk.preferencesProperty().addListener((property, before, now) -> {
@@ -81,10 +81,13 @@ public final class OfficeShell {
     }
 
     private void dress() {
-        Preferences preferences = desk.preferences();
-        ToolkitLanguage.set(preferences.locale());
-        Theme.applyOffice(scene, preferences.night() ? Light.NIGHT : Light.DAY,
-                new Density(preferences.dpi(), Hand.BARE));
+        ToolkitLanguage.set(desk.preferences().locale());
+        light.dress();
+    }
+
+    /** Looks whether the clock brought another light, as it does by itself every few seconds. */
+    void followClock() {
+        light.follow();
     }
 
     /** Opens a room. */
@@ -143,23 +146,14 @@ public final class OfficeShell {
 
     private Node head() {
         Wording wording = desk.wording();
-        boolean night = desk.preferences().night();
-        ActionButton light = ActionButton.of(night ? Icon.SUN : Icon.MOON, Weight.PLAIN,
-                wording.text(night ? "screen.start.light.day" : "screen.start.light.night"), () ->
-                        desk.preferencesProperty().set(desk.preferences().withNight(!night)));
-        light.setId("light");
-        String language = desk.preferences().locale().getLanguage();
-        ActionButton words = new ActionButton(Weight.PLAIN, language.equals("es") ? "English" : "Español", () ->
-                desk.preferencesProperty().set(desk.preferences().withLocale(
-                        Locale.forLanguageTag(language.equals("es") ? "en" : "es"))));
-        words.setId("language");
         TextField person = new TextField(desk.person());
         person.setId("person");
         person.setPromptText(wording.text("office.person"));
         person.setAccessibleText(wording.text("office.person"));
         person.textProperty().addListener((property, before, now) ->
                 desk.preferencesProperty().set(desk.preferences().withPerson(now.strip())));
-        HBox more = new HBox(person, words, light);
+        HBox more = new HBox(person, LookButtons.language(desk.preferencesProperty()),
+                LookButtons.light(desk.preferencesProperty()));
         more.getStyleClass().add("more");
         TopBar bar = new TopBar(more);
         bar.titleProperty().set(wording.text("screen.name"));
@@ -239,7 +233,7 @@ public final class OfficeShell {
     /** Lets go of the screen and closes the store. */
     public void close() {
         shown.end();
-        listening.end();
+        light.stop();
         receive.close();
         desk.close();
     }

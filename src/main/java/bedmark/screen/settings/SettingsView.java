@@ -21,7 +21,6 @@ import bedmark.words.Words;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.UnaryOperator;
@@ -139,12 +138,8 @@ public final class SettingsView extends SidedScreen {
 
     private List<ChoiceRow.Option> languages(Preferences now) {
         return Words.LANGUAGES.stream().map(locale -> option("language-" + locale.getLanguage(),
-                capital(locale.getDisplayLanguage(locale), locale),
+                Words.nameOf(locale),
                 now.locale().getLanguage().equals(locale.getLanguage()), likes -> likes.withLocale(locale))).toList();
-    }
-
-    private static String capital(String word, Locale locale) {
-        return word.substring(0, 1).toUpperCase(locale) + word.substring(1);
     }
 
     private List<ChoiceRow.Option> lights(Preferences now) {

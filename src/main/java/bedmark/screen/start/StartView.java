@@ -22,7 +22,6 @@ import bedmark.survey.Round;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.scene.control.ContentDisplay;
@@ -141,13 +140,9 @@ public final class StartView extends SidedScreen {
 
     private List<ChoiceRow.Option> languages() {
         return Words.LANGUAGES.stream().map(locale -> new ChoiceRow.Option("language-" + locale.getLanguage(),
-                capital(locale.getDisplayLanguage(locale), locale),
+                Words.nameOf(locale),
                 workplace.preferences().locale().getLanguage().equals(locale.getLanguage()),
                 () -> prefer(workplace.preferences().withLocale(locale)))).toList();
-    }
-
-    private static String capital(String word, Locale locale) {
-        return word.substring(0, 1).toUpperCase(locale) + word.substring(1);
     }
 
     private List<ChoiceRow.Option> lights() {

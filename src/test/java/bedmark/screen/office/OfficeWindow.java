@@ -5,6 +5,7 @@ import bedmark.office.OfficeStore;
 import bedmark.office.Offices;
 import bedmark.screen.Glass;
 import java.nio.file.Path;
+import java.time.Clock;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
@@ -26,9 +27,13 @@ final class OfficeWindow implements AutoCloseable {
     private volatile Path chosen;
 
     OfficeWindow(Path folder, double width, double height) throws Exception {
-        OfficeStore store = OfficeStore.open(folder, OfficeOptions.of(Offices.NOW));
+        this(folder, Offices.NOW, width, height);
+    }
+
+    OfficeWindow(Path folder, Clock clock, double width, double height) throws Exception {
+        OfficeStore store = OfficeStore.open(folder, OfficeOptions.of(clock));
         chosen = folder;
-        desk = Glass.on(() -> new OfficeDesk(store, Offices.NOW, Platform::runLater, (title, begin) ->
+        desk = Glass.on(() -> new OfficeDesk(store, clock, Platform::runLater, (title, begin) ->
                 Optional.of(chosen)));
         Stage stage = FxToolkit.registerPrimaryStage();
         Glass.on(() -> {
@@ -84,6 +89,14 @@ final class OfficeWindow implements AutoCloseable {
     void type(String text) throws TimeoutException {
         robot.write(text);
         settle();
+    }
+
+    /** Lets the window look at its clock. */
+    void ticks() throws Exception {
+        Glass.on(() -> {
+            shell.followClock();
+            return null;
+        });
     }
 
     FxRobot robot() {

@@ -2,6 +2,7 @@ package bedmark.screen.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
@@ -14,15 +15,20 @@ import bedmark.office.RankedZone;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import bedmark.screen.Glass;
+import bedmark.screen.Lighting;
 import bedmark.survey.Bundle;
 import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Instant;
+import java.time.InstantSource;
 import java.time.LocalDate;
+import java.time.ZoneOffset;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.concurrent.atomic.AtomicReference;
 import java.util.stream.Stream;
 import javafx.scene.Node;
 import javafx.scene.control.ComboBox;
@@ -33,6 +39,8 @@ import javafx.scene.control.TableView;
 import javafx.scene.control.TextField;
 import javafx.scene.control.skin.DatePickerSkin;
 import javafx.scene.input.KeyCode;
+import javafx.scene.layout.Region;
+import javafx.scene.paint.Paint;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -63,6 +71,34 @@ class OfficeWindowTest {
         window.click("room-receive");
         window.chooses(packs);
         window.click("receive-folder");
+    }
+
+    @Test
+    void theLightFollowsTheClockWhereThatWasChosen() throws Exception {
+        AtomicReference<Instant> now = new AtomicReference<>(Offices.NOW.instant());
+        InstantSource watch = now::get;
+        try (OfficeWindow window = new OfficeWindow(folder.resolve("office"), watch.withZone(ZoneOffset.UTC), 1280,
+                800)) {
+            Paint day = ground(window);
+            window.click("light");
+            assertNotEquals(day, ground(window));
+            window.click("light");
+            assertEquals(Lighting.CLOCK, window.desk().preferences().lighting());
+            assertEquals(day, ground(window));
+            now.set(Instant.parse("2026-10-01T20:00:00Z"));
+            window.ticks();
+            assertNotEquals(day, ground(window));
+            now.set(Instant.parse("2026-10-02T08:00:00Z"));
+            window.ticks();
+            assertEquals(day, ground(window));
+            window.click("light");
+            assertEquals(Lighting.DAY, window.desk().preferences().lighting());
+        }
+    }
+
+    private static Paint ground(OfficeWindow window) throws Exception {
+        window.settle();
+        return Glass.on(() -> ((Region) window.shell().scene().getRoot()).getBackground().getFills().get(0).getFill());
     }
 
     @Test

@@ -20,7 +20,7 @@ import javafx.scene.layout.VBox;
 
 /** What each table that was read is taken for, and each of its columns: shown, and chosen anew where it is wrong. */
 final class RegisterMapping extends VBox {
-    private final RegisterModel model;
+    private final ImportModel model;
     private final Wording wording;
 
     /** @param code what it stands for; empty for what is not taken in, or for no unit */
@@ -31,7 +31,7 @@ final class RegisterMapping extends VBox {
         }
     }
 
-    RegisterMapping(RegisterModel model, Draft draft, Wording wording) {
+    RegisterMapping(ImportModel model, Draft draft, Wording wording) {
         this.model = model;
         this.wording = wording;
         getStyleClass().add("mapping");

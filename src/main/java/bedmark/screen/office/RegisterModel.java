@@ -6,16 +6,12 @@ import bedmark.document.Refused;
 import bedmark.journal.NotSaved;
 import bedmark.office.RoundDesk;
 import bedmark.office.register.Draft;
-import bedmark.office.register.Meanings;
 import bedmark.office.register.RegisterChange;
 import bedmark.office.register.RegisterDesk;
 import bedmark.office.register.RegisterGrid;
 import bedmark.office.register.RegisterImport;
 import bedmark.office.register.RegisterTables;
-import bedmark.office.register.Table;
-import bedmark.office.register.Tables;
 import bedmark.pack.RoundFile;
-import bedmark.quantity.Unit;
 import bedmark.screen.office.RegisterLine.Shown;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -24,13 +20,11 @@ import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Consumer;
 import java.util.stream.IntStream;
-import java.util.stream.Stream;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
@@ -40,7 +34,7 @@ import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 
-/** A plant's register on the office's screen: shown as tables, edited cell by cell, taken in and written out. */
+/** A plant's register on the office's screen: shown as tables, edited cell by cell, and written out. */
 public final class RegisterModel {
     private final OfficeDesk desk;
     private final ObjectProperty<Optional<String>> plant = new SimpleObjectProperty<>(Optional.empty());
@@ -51,17 +45,16 @@ public final class RegisterModel {
             new ReadOnlyObjectWrapper<>(List.of());
     private final ReadOnlyObjectWrapper<Optional<Defect>> stays = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyBooleanWrapper fresh = new ReadOnlyBooleanWrapper();
-    private final ReadOnlyObjectWrapper<Optional<Draft>> draft = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyObjectWrapper<Optional<Path>> written = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ObservableList<RegisterLine> lines = FXCollections.observableArrayList();
-    private List<Table> tables = List.of();
-    private Meanings meanings = Meanings.AS_NAMED;
+    private final ImportModel importing;
     private final RegisterEdits edits = new RegisterEdits();
     /** The lists in which a new row is being typed. */
     private final Set<List<String>> begun = new HashSet<>();
 
     RegisterModel(OfficeDesk desk) {
         this.desk = desk;
+        this.importing = new ImportModel(desk, plant);
         plant.addListener((property, before, now) -> lookElsewhere());
         list.addListener((property, before, now) -> lookElsewhere());
         desk.changesProperty().addListener((property, before, now) -> refresh());
@@ -154,9 +147,9 @@ public final class RegisterModel {
         return grid.getReadOnlyProperty();
     }
 
-    /** What an import would do, until it is taken over or left. */
-    public ReadOnlyObjectProperty<Optional<Draft>> draftProperty() {
-        return draft.getReadOnlyProperty();
+    /** What is taken in from tables of other programs, for the plant that is shown. */
+    ImportModel importing() {
+        return importing;
     }
 
     /** Where something was written last. */
@@ -274,68 +267,6 @@ public final class RegisterModel {
                 stays.set(Optional.of(RegisterWords.of(desk.wording(), removed, defects.get(0))));
             }
         });
-    }
-
-    /** Reads the tables of a folder; nothing is taken in yet. */
-    public void read(Path folder) {
-        desk.ask(progress -> {
-            List<Table> read = new ArrayList<>();
-            files(folder).forEach(file -> read.addAll(Tables.read(file)));
-            return read;
-        }, read -> {
-            tables = List.copyOf(read);
-            draw(Meanings.AS_NAMED);
-        });
-    }
-
-    private void draw(Meanings meant) {
-        Optional<String> id = plant.get();
-        meanings = meant;
-        List<Table> drawn = tables;
-        desk.ask(progress -> RegisterImport.draft(head(id), drawn, meant), made -> draft.set(Optional.of(made)));
-    }
-
-    /** The tables that were read, by where they come from. */
-    public List<String> sources() {
-        return tables.stream().map(Table::source).toList();
-    }
-
-    /** A table holds that list; none where it is empty. */
-    public void holds(String source, String holding) {
-        draw(meanings.holding(source, holding));
-    }
-
-    /** A column is that, in that unit; it is not taken in where the key is empty. */
-    public void means(String source, String head, String key, Optional<Unit> unit) {
-        draw(meanings.with(new Meanings.Head(source, head), key, unit));
-    }
-
-    private static List<Path> files(Path folder) {
-        try (Stream<Path> held = Files.list(folder)) {
-            List<Path> files = held.filter(file -> file.getFileName().toString().toLowerCase(Locale.ROOT)
-                    .matches(".*\\.(csv|xlsx)")).sorted().toList();
-            if (files.isEmpty()) {
-                throw new Refused(Defect.in(folder.toString(), "table-none"));
-            }
-            return files;
-        } catch (IOException e) {
-            throw new Refused(Defect.in(folder.toString(), "folder-absent"), e);
-        }
-    }
-
-    /** Takes the draft over. */
-    public void take() {
-        Draft made = draft.get().orElseThrow();
-        String person = desk.person();
-        desk.change(progress -> {
-            new RegisterDesk(desk.store()).take(made, "import", person);
-            return true;
-        }, done -> draft.set(Optional.empty()));
-    }
-
-    /** Leaves the draft. */
-    public void leave() {
-        draft.set(Optional.empty());
     }
 
     /** Writes the register as tables. */

@@ -45,7 +45,7 @@ final class RegisterRowTools extends VBox {
         refused.managedProperty().bind(refused.visibleProperty());
         getChildren().addAll(buttons, asked, refused);
         listening.onChange(model.freshProperty(), fresh -> show());
-        listening.onChange(model.draftProperty(), draft -> {
+        listening.onChange(model.importing().draftProperty(), draft -> {
             leaving = Optional.empty();
             show();
         });
@@ -64,7 +64,7 @@ final class RegisterRowTools extends VBox {
 
     private void show() {
         List<Node> shown = new ArrayList<>(others);
-        if (model.gridProperty().get().isPresent() && model.draftProperty().get().isEmpty()) {
+        if (model.gridProperty().get().isPresent() && model.importing().draftProperty().get().isEmpty()) {
             shown.addAll(rowTools());
         }
         buttons.getChildren().setAll(shown);

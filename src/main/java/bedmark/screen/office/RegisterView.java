@@ -29,6 +29,7 @@ import javafx.scene.layout.VBox;
 final class RegisterView extends VBox {
     private final OfficeDesk desk;
     private final RegisterModel model;
+    private final ImportModel importing;
     private final Wording wording;
     private final BorderPane middle = new BorderPane();
     private final ScrollPane drafted = new ScrollPane();
@@ -36,6 +37,7 @@ final class RegisterView extends VBox {
     RegisterView(OfficeDesk desk, RegisterModel model, Listening listening) {
         this.desk = desk;
         this.model = model;
+        this.importing = model.importing();
         this.wording = desk.wording();
         getStyleClass().add("room");
         HBox plants = new HBox();
@@ -58,7 +60,7 @@ final class RegisterView extends VBox {
             table.show(grid);
             show(table);
         });
-        listening.onChange(model.draftProperty(), draft -> show(table));
+        listening.onChange(importing.draftProperty(), draft -> show(table));
         listening.to(model.plantsProperty(), known -> {
             plants.setVisible(known.size() > 1);
             plants.getChildren().setAll(plants(known));
@@ -88,7 +90,7 @@ final class RegisterView extends VBox {
     }
 
     private List<Node> buttons() {
-        return List.of(button("import", "office.register.import", model::read),
+        return List.of(button("import", "office.register.import", importing::read),
                 button("export", "office.register.export", model::write),
                 button("send-round", "office.register.send", model::send));
     }
@@ -101,8 +103,8 @@ final class RegisterView extends VBox {
     }
 
     private void show(RegisterTable table) {
-        Node shown = model.draftProperty().get().map(this::draft).orElseGet(() -> model.gridProperty().get().isPresent()
-                ? table : new Label(wording.text("office.register.none")));
+        Node shown = importing.draftProperty().get().map(this::draft).orElseGet(() ->
+                model.gridProperty().get().isPresent() ? table : new Label(wording.text("office.register.none")));
         if (middle.getCenter() != shown) {
             middle.setCenter(shown);
         }
@@ -117,16 +119,16 @@ final class RegisterView extends VBox {
         FlowPane decide = new FlowPane();
         decide.getStyleClass().add("buttons");
         if (draft.sound()) {
-            ActionButton take = new ActionButton(Weight.PRIMARY, wording.text("office.register.take"), model::take);
+            ActionButton take = new ActionButton(Weight.PRIMARY, wording.text("office.register.take"), importing::take);
             take.setId("take-draft");
             decide.getChildren().add(take);
         }
-        ActionButton leave = new ActionButton(Weight.PLAIN, wording.text("office.register.leave"), model::leave);
+        ActionButton leave = new ActionButton(Weight.PLAIN, wording.text("office.register.leave"), importing::leave);
         leave.setId("leave-draft");
         decide.getChildren().add(leave);
         box.getChildren().add(decide);
         draft.defects().forEach(defect -> box.getChildren().add(Texts.trouble(wording.sentence(defect))));
-        box.getChildren().add(new RegisterMapping(model, draft, wording));
+        box.getChildren().add(new RegisterMapping(importing, draft, wording));
         showDraft(box);
         return drafted;
     }

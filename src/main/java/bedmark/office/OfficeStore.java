@@ -8,11 +8,8 @@ import bedmark.index.Device;
 import bedmark.index.DeviceFile;
 import bedmark.index.office.OfficeBroken;
 import bedmark.index.office.OfficeTables;
-import bedmark.index.office.PackedZone;
-import bedmark.index.office.Verdict;
 import bedmark.index.office.ZoneNames;
 import bedmark.journal.Fault;
-import bedmark.journal.FileLayer;
 import bedmark.journal.Progress;
 import bedmark.json.JsonReader;
 import bedmark.office.FlatColumn.FlatRow;
@@ -24,24 +21,17 @@ import bedmark.survey.Entry;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Register;
 import bedmark.survey.Survey;
-import bedmark.survey.merge.Copy;
 import bedmark.survey.merge.Merge;
 import bedmark.survey.merge.MergedZone;
 import bedmark.survey.merge.ZoneId;
 import java.io.Closeable;
 import java.io.IOException;
-import java.lang.ref.SoftReference;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.time.ZonedDateTime;
 import java.util.Collection;
-import java.util.HashMap;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.function.Consumer;
 import java.util.function.Function;
@@ -54,14 +44,8 @@ public final class OfficeStore implements AutoCloseable {
     /** The folder in a person's home that is the office's unless they say otherwise. */
     public static final String USUAL_FOLDER = ".bedmark-office";
 
-    private static final String LOCK = "store.lock";
     static final String PACKS = "packs";
-    private static final String PASSING = "passing";
-    private static final String OFFICE = "office.json";
-    /** What an opening that was cut off may leave, and a key that packs were signed with. */
-    private static final Set<String> BEGUN =
-            Set.of(LOCK, PACKS, PASSING, FolderBooks.JOURNAL, FolderBooks.INDEX, DeviceKey.FILE);
-    private static final int JUDGED_AT_ONCE = 500;
+    static final String PASSING = "passing";
 
     private final Path folder;
     private final OfficeOptions options;
@@ -70,15 +54,14 @@ public final class OfficeStore implements AutoCloseable {
     private final PackShelf shelf;
     private volatile Device device;
     private final Books books;
-    private final Judge judge;
     private final Results results;
+    private final Listing listing;
     private final PackPhotos photos;
     private Minutes minutes = new Minutes();
-    private SoftReference<List<PackedZone>> rows = new SoftReference<>(null);
     private final AtomicBoolean closed = new AtomicBoolean();
 
-    private OfficeStore(Path folder, Optional<String> url, OfficeOptions options, Desk desk, Closeable lock,
-                        String index, boolean afresh) throws IOException {
+    OfficeStore(Path folder, Optional<String> url, OfficeOptions options, Desk desk, Closeable lock,
+                String index, boolean afresh) throws IOException {
         this.folder = folder;
         this.options = options;
         this.desk = desk;
@@ -87,15 +70,15 @@ public final class OfficeStore implements AutoCloseable {
                 url.isPresent());
         shelf.open();
         this.photos = new PackPhotos(shelf, options.limits());
-        DeviceFile file = new DeviceFile(folder, options.files(), OFFICE);
+        DeviceFile file = new DeviceFile(folder, options.files(), OfficeOpening.OFFICE);
         Optional<Device> known = file.read();
         this.device = known.isPresent() ? known.get() : file.write(Optional.empty(), options.name());
         Effects effects = new Effects(shelf, options.limits(), this::minutes);
         this.books = url.isPresent()
                 ? new ServerBooks(url.get(), options, device.id(), effects, () -> minutes = new Minutes())
                 : FolderBooks.open(folder, index, options, device.id(), effects, afresh);
-        this.judge = new Judge(this::version);
-        this.results = new Results(judge, this::minutes);
+        this.results = new Results(new Judge(this::version), this::minutes);
+        this.listing = new Listing(this, results, options.clock(), url.isPresent());
     }
 
     /**
@@ -106,7 +89,7 @@ public final class OfficeStore implements AutoCloseable {
      *                 where it can't be used
      */
     public static OfficeStore open(Path folder, OfficeOptions options) {
-        return open(folder, Optional.empty(), options, FolderBooks.INDEX, false);
+        return OfficeOpening.of(folder, Optional.empty(), options, FolderBooks.INDEX, false);
     }
 
     /**
@@ -121,17 +104,17 @@ public final class OfficeStore implements AutoCloseable {
         if (!OfficeTables.isServer(url)) {
             throw new IllegalArgumentException("no server");
         }
-        return open(own, Optional.of(url), options, FolderBooks.INDEX, false);
+        return OfficeOpening.of(own, Optional.of(url), options, FolderBooks.INDEX, false);
     }
 
     /** As {@link #open(Path, OfficeOptions)}, with the tables made anew from the journal and the packs. */
     public static OfficeStore rebuild(Path folder, OfficeOptions options) {
-        return open(folder, Optional.empty(), options, FolderBooks.INDEX, true);
+        return OfficeOpening.of(folder, Optional.empty(), options, FolderBooks.INDEX, true);
     }
 
     /** Whether a folder holds an office store. */
     public static boolean isOffice(Path folder) {
-        return FileLayer.disk().exists(folder.resolve(OFFICE));
+        return OfficeOpening.isOffice(folder);
     }
 
     /** Whether a text names a database server rather than a folder. */
@@ -141,56 +124,11 @@ public final class OfficeStore implements AutoCloseable {
 
     /** An office with its tables made anew in a folder of another name, beside those in use. */
     static OfficeStore beside(Path folder, String index, OfficeOptions options) {
-        return open(folder, Optional.empty(), options, index, true);
-    }
-
-    private static OfficeStore open(Path folder, Optional<String> url, OfficeOptions options, String index,
-                                    boolean afresh) {
-        Path home = folder.toAbsolutePath().normalize();
-        Desk desk = new Desk("bedmark-office");
-        try {
-            return desk.call(() -> openLocked(home, url, options, desk, index, afresh));
-        } catch (RuntimeException e) {
-            desk.close();
-            throw refused(e);
-        }
-    }
-
-    private static OfficeStore openLocked(Path folder, Optional<String> url, OfficeOptions options, Desk desk,
-                                          String index, boolean afresh) {
-        FileLayer files = options.files();
-        try {
-            if (!files.exists(folder.resolve(OFFICE))) {
-                checkFree(folder, files);
-            }
-            files.createFolder(folder);
-            Closeable lock = files.lock(folder.resolve(LOCK))
-                    .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "store-locked")));
-            try {
-                return new OfficeStore(folder, url, options, desk, lock, index, afresh);
-            } catch (IOException | RuntimeException e) {
-                lock.close();
-                throw e;
-            }
-        } catch (IOException e) {
-            throw new Refused(Fault.defect("store", e, files, folder), e);
-        }
-    }
-
-    /** An office is begun only where nothing else is. */
-    private static void checkFree(Path folder, FileLayer files) throws IOException {
-        if (files.exists(folder.resolve(DeviceFile.NAME))) {
-            throw new Refused(Defect.in(folder.toString(), "store-of-tablet"));
-        } else if (Files.isRegularFile(folder)) {
-            throw new Refused(Defect.in(folder.toString(), "store-is-file"));
-        } else if (files.exists(folder) && files.list(folder).stream().map(file -> file.getFileName().toString())
-                .anyMatch(name -> !BEGUN.contains(name) && !name.startsWith(OFFICE) && !name.startsWith("."))) {
-            throw new Refused(Defect.in(folder.toString(), "office-folder-other"));
-        }
+        return OfficeOpening.of(folder, Optional.empty(), options, index, true);
     }
 
     /** A database that fails is told in words too. */
-    private static RuntimeException refused(RuntimeException failure) {
+    static RuntimeException refused(RuntimeException failure) {
         return failure instanceof OfficeBroken
                 ? new Refused(Defect.in("", "office-database-failed", String.valueOf(failure.getMessage())), failure)
                 : failure;
@@ -274,7 +212,7 @@ public final class OfficeStore implements AutoCloseable {
         try {
             return desk.call(() -> {
                 try {
-                    rows.clear();
+                    listing.changing();
                     return books.keep(deeds);
                 } catch (RuntimeException e) {
                     // It may have read a deed that was taken back.
@@ -326,12 +264,7 @@ public final class OfficeStore implements AutoCloseable {
      * @param progress told while zones are judged that were not judged since they changed
      */
     public List<RankedZone> rank(RankQuery query, Progress progress) {
-        judgeWaiting(progress);
-        ZonedDateTime now = ZonedDateTime.now(options.clock());
-        return ask(tables -> {
-            Minutes known = minutes(tables);
-            return new Ranking(now, query, known::answers).rank(zones(tables));
-        });
+        return listing.rank(query, progress);
     }
 
     /**
@@ -341,58 +274,17 @@ public final class OfficeStore implements AutoCloseable {
      * @param atMost how many; at least 1
      */
     public List<RankedZone> worst(RankQuery query, int atMost, Progress progress) {
-        judgeWaiting(progress);
-        ZonedDateTime now = ZonedDateTime.now(options.clock());
-        Optional<List<RankedZone>> head = ask(tables -> {
-            Minutes known = minutes(tables);
-            return new Ranking(now, query, known::answers).head(tables, atMost);
-        });
-        return head.orElseGet(() -> rank(query, progress).stream().limit(atMost).toList());
-    }
-
-    /** Every zone's row; kept until something changes, where nobody else can change it. */
-    private List<PackedZone> zones(OfficeTables tables) {
-        List<PackedZone> kept = rows.get();
-        if (kept == null || books instanceof ServerBooks) {
-            kept = tables.zones();
-            rows = new SoftReference<>(kept);
-        }
-        return kept;
+        return listing.worst(query, atMost, progress);
     }
 
     /** A zone as it stands in the list. */
     public Optional<RankedZone> ranked(ZoneId zone) {
-        judgeWaiting(Progress.NONE);
-        ZonedDateTime now = ZonedDateTime.now(options.clock());
-        return ask(tables -> {
-            Minutes known = minutes(tables);
-            return tables.zone(zone).map(new Ranking(now, RankQuery.ALL, known::answers)::ranked);
-        });
+        return listing.ranked(zone);
     }
 
+    /** Judges what was not judged since it changed. */
     void judgeWaiting(Progress progress) {
-        long total = ask(OfficeTables::countWaiting);
-        long done = 0;
-        while (done < total && !progress.cancelled()) {
-            progress.at(done, total);
-            int judged = ask(tables -> {
-                // What is judged must not change before it is written down.
-                tables.alone();
-                List<ZoneId> zones = tables.waiting(JUDGED_AT_ONCE);
-                // An earlier program let them stand by the clock of the tablet.
-                Effects.stand(tables, tables.datedAhead(zones), minutes(tables));
-                Map<ZoneId, Optional<Verdict>> verdicts = new LinkedHashMap<>();
-                results.latest(tables, zones).forEach((zone, sides) -> verdicts.put(zone,
-                        sides.stream().min(Judge.WORST_FIRST).map(worst -> Judge.verdict(worst.assessment()))));
-                tables.judge(verdicts);
-                rows.clear();
-                return zones.size();
-            });
-            if (judged == 0) {
-                return;
-            }
-            done += judged;
-        }
+        listing.judgeWaiting(progress);
     }
 
     /**
@@ -424,21 +316,7 @@ public final class OfficeStore implements AutoCloseable {
 
     /** Contents with what the flat table tells of them, in the order of the digests. */
     List<FlatRow> rows(List<String> digests) {
-        return ask(tables -> {
-            Map<String, Copy> copies = tables.copiesOf(digests);
-            Map<String, Survey> documents = Results.documents(tables, digests);
-            List<Copy> ordered = digests.stream().map(copies::get).toList();
-            Set<String> counting = new HashSet<>();
-            Merge.zones(tables.copies(ordered.stream().map(Copy::zone).distinct().toList()),
-                    minutes(tables).setAside()).values().forEach(zone -> zone.visits().forEach(copy ->
-                    counting.add(copy.digest())));
-            Map<String, JudgedZone> judged = new HashMap<>();
-            results.judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
-                    .forEach(one -> judged.put(one.copy().digest(), one));
-            return ordered.stream().map(copy -> new FlatRow(copy, counting.contains(copy.digest()),
-                    documents.get(copy.digest()), judge.register(copy.origin().register()),
-                    Optional.ofNullable(judged.get(copy.digest())))).toList();
-        });
+        return ask(tables -> results.rows(tables, digests));
     }
 
     /** What counts of a zone's surveys. */
@@ -499,7 +377,7 @@ public final class OfficeStore implements AutoCloseable {
     public void rename(String name) {
         desk.call(() -> {
             try {
-                device = new DeviceFile(folder, options.files(), OFFICE).write(Optional.of(device.id()), name);
+                device = new DeviceFile(folder, options.files(), OfficeOpening.OFFICE).write(Optional.of(device.id()), name);
                 return true;
             } catch (IOException e) {
                 throw new Refused(Fault.defect("store", e, options.files(), folder), e);

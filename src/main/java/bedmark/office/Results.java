@@ -2,6 +2,7 @@ package bedmark.office;
 
 import bedmark.index.office.OfficeTables;
 import bedmark.json.JsonReader;
+import bedmark.office.FlatColumn.FlatRow;
 import bedmark.office.trend.ZoneTrend;
 import bedmark.survey.Survey;
 import bedmark.survey.merge.Clash;
@@ -16,6 +17,7 @@ import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
 import java.util.stream.Collectors;
@@ -82,6 +84,23 @@ final class Results {
         Map<String, Survey> documents = documents(tables, wanted);
         return copies.stream().flatMap(copy -> judge.judge(copy, register.apply(copy),
                 drives.getOrDefault(drive(copy), List.of()), documents).stream()).toList();
+    }
+
+    /** Contents with what the flat table tells of them, in the order of the digests. */
+    List<FlatRow> rows(OfficeTables tables, List<String> digests) {
+        Map<String, Copy> copies = tables.copiesOf(digests);
+        Map<String, Survey> documents = documents(tables, digests);
+        List<Copy> ordered = digests.stream().map(copies::get).toList();
+        Set<String> counting = new HashSet<>();
+        Merge.zones(tables.copies(ordered.stream().map(Copy::zone).distinct().toList()),
+                minutes.apply(tables).setAside()).values().forEach(zone -> zone.visits().forEach(copy ->
+                counting.add(copy.digest())));
+        Map<String, JudgedZone> judged = new HashMap<>();
+        judged(tables, ordered.stream().filter(Copy::result).toList(), copy -> copy.origin().register())
+                .forEach(one -> judged.put(one.copy().digest(), one));
+        return ordered.stream().map(copy -> new FlatRow(copy, counting.contains(copy.digest()),
+                documents.get(copy.digest()), judge.register(copy.origin().register()),
+                Optional.ofNullable(judged.get(copy.digest())))).toList();
     }
 
     private static String drive(Copy copy) {

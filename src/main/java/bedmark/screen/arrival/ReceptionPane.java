@@ -86,8 +86,8 @@ final class ReceptionPane extends VBox {
         told.getChildren().clear();
         Optional<Reception> reception = model.receptionProperty().get();
         Optional<Received> outcome = reception.flatMap(Reception::outcome);
-        outcome.ifPresent(came -> told.getChildren().add(new ReceivedRow(wording, came, turned ->
-                reception.get().receiving().trust(turned))));
+        outcome.ifPresent(came -> told.getChildren().add(new ReceivedRow(wording, came, reception.get().receiving()
+                .receiptOf(came), turned -> reception.get().receiving().trust(turned))));
         Optional<Defect> trouble = model.errand().troubleProperty().get().or(() ->
                 reception.flatMap(open -> open.desk().troubleProperty().get()));
         trouble.ifPresent(defect -> {

@@ -14,7 +14,9 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Executors;
 import java.util.concurrent.ScheduledExecutorService;
@@ -32,6 +34,7 @@ public final class ReceiveModel {
     private final OfficeDesk desk;
     private final ObservableList<Received> received = FXCollections.observableArrayList();
     private final ReadOnlyObjectWrapper<List<Earlier>> earlier = new ReadOnlyObjectWrapper<>(List.of());
+    private final Map<Received, Path> receipts = new HashMap<>();
     private final ReadOnlyObjectWrapper<List<Refusal>> refused = new ReadOnlyObjectWrapper<>(List.of());
     private final ReadOnlyObjectWrapper<Optional<Path>> watched = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ScheduledExecutorService watch = Executors.newSingleThreadScheduledExecutor(run -> {
@@ -49,8 +52,9 @@ public final class ReceiveModel {
     public record Earlier(String file, String device, OffsetDateTime at) {
     }
 
-    /** What came of packs, why the first receipt could not be written that was not, and what is still refused. */
-    private record Came(List<Received> packs, Optional<Defect> unwritten, List<Refusal> refused) {
+    /** What came of packs, where their receipts are, why the first was not written, and what is still refused. */
+    private record Came(List<Received> packs, Map<Received, Path> receipts, Optional<Defect> unwritten,
+                        List<Refusal> refused) {
     }
 
     /** A model at a desk; what came before it is told apart from what comes now. */
@@ -62,6 +66,11 @@ public final class ReceiveModel {
     /** What came, the newest first. */
     public ObservableList<Received> received() {
         return received;
+    }
+
+    /** Where the receipt of something that came was written; nothing where there is none. */
+    public Optional<Path> receiptOf(Received came) {
+        return Optional.ofNullable(receipts.get(came));
     }
 
     /** What came before, the newest first; not more of it than anybody looks through. */
@@ -159,19 +168,21 @@ public final class ReceiveModel {
 
     private Came take(List<Path> files, Progress progress) {
         List<Received> packs = desk.store().receive(files, desk.person(), progress);
+        Map<Received, Path> written = new HashMap<>();
         List<Defect> unwritten = new ArrayList<>();
         packs.forEach(one -> one.confirmed().ifPresent(receipt -> {
             try {
-                desk.store().write(receipt, one.file().toAbsolutePath().getParent());
+                written.put(one, desk.store().write(receipt, one.file().toAbsolutePath().getParent()));
             } catch (Refused e) {
                 // The pack is in; the same pack received again writes its receipt again.
                 unwritten.add(e.defect());
             }
         }));
-        return new Came(packs, unwritten.stream().findFirst(), refusals());
+        return new Came(packs, written, unwritten.stream().findFirst(), refusals());
     }
 
     private void show(Came came) {
+        receipts.putAll(came.receipts());
         came.packs().forEach(one -> received.add(0, one));
         refused.set(came.refused());
         came.unwritten().ifPresent(desk::tell);

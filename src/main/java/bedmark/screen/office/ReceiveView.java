@@ -96,7 +96,7 @@ final class ReceiveView extends VBox {
 
     private void show() {
         rows.getChildren().setAll(model.received().stream()
-                .map(one -> new ReceivedRow(wording, one, model::trust)).toList());
+                .map(one -> new ReceivedRow(wording, one, model.receiptOf(one), model::trust)).toList());
         if (rows.getChildren().isEmpty()) {
             Label none = Texts.wrapped(wording.text("office.receive.none"));
             none.getStyleClass().add("soft");

@@ -8,6 +8,8 @@ import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
 import bedmark.survey.merge.Clash;
 import bedmark.wording.Wording;
+import java.nio.file.Path;
+import java.util.Optional;
 import java.util.function.Consumer;
 import javafx.geometry.Pos;
 import javafx.scene.control.Label;
@@ -22,7 +24,7 @@ public final class ReceivedRow extends HBox {
 
     /** A pack that was refused before, with the time. */
     ReceivedRow(Wording wording, Refusal refusal, Consumer<Received.Turned> trust) {
-        this(wording, refusal.turned(), trust);
+        this(wording, refusal.turned(), Optional.empty(), trust);
         Label when = Texts.wrapped(Wording.plain(refusal.first().equals(refusal.last())
                 ? wording.text("office.receive.turned", wording.moment(refusal.last()), folder(refusal))
                 : wording.text("office.receive.turned-again", wording.moment(refusal.last()), folder(refusal),
@@ -35,8 +37,12 @@ public final class ReceivedRow extends HBox {
         return String.valueOf(refusal.turned().file().getParent());
     }
 
-    /** @param trust told that the person compared the fingerprint of a pack's device */
-    public ReceivedRow(Wording wording, Received received, Consumer<Received.Turned> trust) {
+    /**
+     * @param receipt where the receipt for the tablet was written
+     * @param trust   told that the person compared the fingerprint of a pack's device
+     */
+    public ReceivedRow(Wording wording, Received received, Optional<Path> receipt,
+                       Consumer<Received.Turned> trust) {
         this.wording = wording;
         getStyleClass().add("received-row");
         setAlignment(Pos.CENTER_LEFT);
@@ -65,6 +71,13 @@ public final class ReceivedRow extends HBox {
                 getChildren().add(button);
             }
         }
+        receipt.ifPresent(this::receipt);
+    }
+
+    private void receipt(Path file) {
+        Label written = Texts.wrapped(Wording.plain(wording.text("office.receive.receipt", file)));
+        written.getStyleClass().add("soft");
+        words.getChildren().add(written);
     }
 
     private void taken(Received.Taken taken) {

@@ -113,7 +113,11 @@ class OfficeWindowTest {
             assertEquals(3, window.desk().store().packs().size());
             assertTrue(window.words().contains("25 new surveys"), window.words());
             try (Stream<Path> files = Files.list(packs)) {
-                assertEquals(3, files.filter(file -> file.toString().endsWith(".receipt.json")).count());
+                List<Path> receipts = files.filter(file -> file.toString().endsWith(".receipt.json")).toList();
+                assertEquals(3, receipts.size());
+                for (Path receipt : receipts) {
+                    assertTrue(window.words().contains("Receipt: " + receipt), window.words());
+                }
             }
         }
     }

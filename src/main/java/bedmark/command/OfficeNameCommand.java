@@ -14,7 +14,7 @@ import picocli.CommandLine.Spec;
 /** Gives the office its name. */
 @Command(name = "name", mixinStandardHelpOptions = true,
         description = "Gives the office the name that its receipts and round files carry; without NAME it tells it.",
-        footer = {"", "Exit codes: 0 named or told; 2 bad use; 3 unreadable store."})
+        footer = {"", "Exit codes: 0 named or told; 2 bad use; 3 a name that does not fit, or unreadable store."})
 final class OfficeNameCommand implements Callable<Integer> {
     private final Surroundings surroundings;
 
@@ -38,7 +38,7 @@ final class OfficeNameCommand implements Callable<Integer> {
         }
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
-            name.ifPresent(one -> store.rename(one.strip()));
+            name.ifPresent(store::rename);
             progress.done();
             surroundings.out().println(Wording.plain(named(surroundings, store.device().name())));
         }

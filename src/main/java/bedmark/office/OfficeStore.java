@@ -372,9 +372,10 @@ public final class OfficeStore implements AutoCloseable {
     /**
      * Gives the office, or this desk, the name that its receipts and round files carry from now on.
      *
-     * @throws Refused {@code store-…} where it can't be written
+     * @throws Refused {@code store-…} where it can't be written, and those of {@link OfficeName#proved}
      */
-    public void rename(String name) {
+    public void rename(String typed) {
+        String name = OfficeName.proved(typed);
         desk.call(() -> {
             try {
                 device = new DeviceFile(folder, options.files(), OfficeOpening.OFFICE).write(Optional.of(device.id()), name);

@@ -89,8 +89,8 @@ class OfficeCommandsTest {
         assertEquals(3, text.out().lines().count(), text::out);
         assertTrue(text.out().lines().anyMatch(line -> line.contains(damaged + ": ") && line.contains("Tablet 3")
                 && line.contains("a key that this office does not trust")), text::out);
-        assertEquals(0, office("receive", packs.resolve("a.zip").toString(), packs.resolve("b.zip").toString(), "--trust",
-                Offices.fingerprint(folder.resolve("tablet"))).code());
+        assertEquals(0, office("receive", packs.resolve("a.zip").toString(), packs.resolve("b.zip").toString(),
+                "--trust", Offices.fingerprint(folder.resolve("tablet"))).code());
         Branch left = JsonReader.read(office("refused", "--json").out().getBytes(StandardCharsets.UTF_8)).root();
         assertEquals(damaged.toString(), left.text("file").orElseThrow());
         assertEquals("trusted", left.text("sender").orElseThrow());
@@ -192,8 +192,8 @@ class OfficeCommandsTest {
 
     @Test
     void everyCommandOfTheOfficeHasHelp() {
-        for (String command : List.of("receive", "refused", "rank", "trend", "energy", "accept", "action", "settle", "export",
-                "import-register", "export-register", "round")) {
+        for (String command : List.of("receive", "refused", "rank", "trend", "energy", "accept", "action", "settle",
+                "export", "import-register", "export-register", "round")) {
             Result help = Terminal.run("office", command, "--help");
             assertEquals(0, help.code());
             assertTrue(help.out().startsWith("Usage: bedmark office " + command), help::out);
@@ -344,6 +344,10 @@ class OfficeCommandsTest {
         assertEquals(0, received().code());
         assertEquals("without a name", office("name").out().strip());
         assertEquals(2, office("name", " ").code());
+        Result tooLong = office("name", "o".repeat(81));
+        assertEquals(3, tooLong.code());
+        assertTrue(tooLong.err().contains("81 characters and 80 are the most"), tooLong.err());
+        assertEquals(3, office("name", "Ostermere\nworks").code());
         assertEquals("Ostermere works office", office("name", "Ostermere works office").out().strip());
         assertTrue(office("receive", packs.toString()).out().contains("Ostermere works office"));
         try (var files = Files.list(packs)) {

@@ -50,6 +50,7 @@ public final class OfficeShell {
     private final Scene scene;
     private final ClockedLight light;
     private final ReceiveModel receive;
+    private final OfficeNameModel name;
     private final WorstModel worst;
     private RegisterModel register;
     private Room room = Room.WORST;
@@ -61,6 +62,7 @@ public final class OfficeShell {
         this.desk = desk;
         this.receive = new ReceiveModel(desk);
         receive.lookBack();
+        this.name = new OfficeNameModel(desk);
         this.worst = new WorstModel(desk);
         this.scene = new Scene(root, width, height);
         this.light = new ClockedLight(desk.clock(), () -> desk.preferences().lighting(), now ->
@@ -96,7 +98,7 @@ public final class OfficeShell {
         story = Optional.empty();
         show(switch (next) {
             case WORST -> new WorstView(desk, worst, begin(), this::zone);
-            case RECEIVE -> new ReceiveView(desk, receive, begin());
+            case RECEIVE -> new ReceiveView(desk, receive, name, begin());
             case ENERGY -> energy(begin());
             case REGISTER -> new RegisterView(desk, register(), begin());
             case REPORT -> new ReportView(desk, new ReportModel(desk), begin());

@@ -35,7 +35,7 @@ final class ReceiveView extends VBox {
     private final Wording wording;
     private final VBox rows = new VBox();
 
-    ReceiveView(OfficeDesk desk, ReceiveModel model, Listening listening) {
+    ReceiveView(OfficeDesk desk, ReceiveModel model, OfficeNameModel name, Listening listening) {
         this.model = model;
         this.wording = desk.wording();
         getStyleClass().add("room");
@@ -43,7 +43,7 @@ final class ReceiveView extends VBox {
         ScrollPane scroll = new ScrollPane(rows);
         scroll.setFitToWidth(true);
         VBox.setVgrow(scroll, Priority.ALWAYS);
-        getChildren().addAll(dropPlace(desk, listening), scroll);
+        getChildren().addAll(dropPlace(desk, listening), new OfficeNamePane(name, wording, listening), scroll);
         ListChangeListener<Received> shown = change -> show();
         model.received().addListener(shown);
         listening.onEnd(() -> model.received().removeListener(shown));

@@ -108,6 +108,7 @@ class OfficeWindowTest {
             window.chooses(packs);
             window.click("receive-folder");
             assertTrue(window.words().contains("does not trust yet"), window.words());
+            named(window, "Ostermere works");
             window.click("trust");
             window.click("receive-folder");
             assertEquals(3, window.desk().store().packs().size());
@@ -117,9 +118,44 @@ class OfficeWindowTest {
                 assertEquals(3, receipts.size());
                 for (Path receipt : receipts) {
                     assertTrue(window.words().contains("Receipt: " + receipt), window.words());
+                    assertTrue(Files.readString(receipt).contains("Ostermere works"));
                 }
             }
+            theNameIsNotLostAndCanBeTakenBack(window);
         }
+    }
+
+    private static void named(OfficeWindow window, String name) throws Exception {
+        window.click("office-name");
+        window.robot().push(KeyCode.SHORTCUT, KeyCode.A);
+        window.robot().push(KeyCode.DELETE);
+        window.type(name);
+        window.click("office-name-save");
+    }
+
+    private static String name(OfficeWindow window) {
+        return window.desk().store().device().name();
+    }
+
+    private void theNameIsNotLostAndCanBeTakenBack(OfficeWindow window) throws Exception {
+        assertTrue(window.node("office-name-save").isDisabled(), "nothing else is typed");
+        named(window, " ");
+        assertTrue(window.words().contains("The office's name is empty"), window.words());
+        named(window, "o".repeat(81));
+        assertTrue(window.words().contains("81 characters"), window.words());
+        assertEquals("Ostermere works", name(window));
+        window.click("language");
+        window.until(() -> window.words().contains("81 caracteres"));
+        assertEquals(81, ((TextField) window.node("office-name")).getText().length());
+        named(window, "Westerly");
+        assertEquals("Westerly", name(window));
+        assertTrue(window.words().contains("dicen Westerly"), window.words());
+        window.click("office-name-back");
+        assertEquals("Ostermere works", name(window));
+        window.click("office-name");
+        window.type("x");
+        window.robot().push(KeyCode.ESCAPE);
+        assertEquals("Ostermere works", ((TextField) window.node("office-name")).getText());
     }
 
     @Test

@@ -219,7 +219,7 @@ final class Receiving {
                 .findFirst().orElseThrow();
     }
 
-    /** The same receipt however often the same pack comes. */
+    /** Under the same id however often the same pack comes; a tablet takes it once, however the office is called. */
     private Optional<Receipt> receipt(Sound pack, Entry entry) {
         List<CopyRow> copies = pack.pack().intake().copies();
         return pack.head().uuid("id").filter(id -> !copies.isEmpty()).map(id -> Receipt.of(

@@ -171,6 +171,12 @@ class StoreCommandsTest {
         Path second = ReceiptWriter.write(whole, office, temp.resolve("whole.receipt.json"));
         fine("store", "receipt", home.toString(), second.toString());
         fine("store", "receipt", home.toString(), second.toString());
+        Receipt renamed = Receipt.of(whole.id(), whole.receivedAt(), new Receipt.Office(whole.office().id(),
+                "Works office"), whole.pack(), whole.packSha256(), items);
+        Path third = ReceiptWriter.write(renamed, office, temp.resolve("renamed.receipt.json"));
+        Terminal.Result told = Terminal.run("store", "receipt", home.toString(), third.toString());
+        assertEquals(0, told.code(), "an office that goes by another name is the same office: " + told.err());
+        assertEquals("Works office: nothing new, " + items.size() + " known before", told.out().strip());
         try (Store store = Store.open(home, options())) {
             assertEquals((long) surveys.size(), store.counts().get(QueueState.RECEIVED));
             assertEquals(2, store.chronicle().receipts().size(), "a receipt that tells nothing new is not noted again");

@@ -62,6 +62,7 @@ public final class OfficeShell {
         this.desk = desk;
         this.receive = new ReceiveModel(desk);
         receive.lookBack();
+        receive.lookAtRefused();
         this.name = new OfficeNameModel(desk);
         this.worst = new WorstModel(desk);
         this.scene = new Scene(root, width, height);
@@ -177,8 +178,18 @@ public final class OfficeShell {
             tab.setOnAction(event -> open(one));
             HBox.setHgrow(tab, Priority.ALWAYS);
             tabs.getChildren().add(tab);
+            if (one == Room.RECEIVE) {
+                shown.to(receive.refusedProperty(), refused -> count(tab, refused.size(), wording));
+            }
         }
         return tabs;
+    }
+
+    /** Whoever comes in the morning looks at the worst zones first. */
+    private static void count(ToggleButton tab, int refused, Wording wording) {
+        String name = wording.text("office.room.receive");
+        tab.setText(refused == 0 ? name : name + " (" + refused + ")");
+        tab.setAccessibleText(wording.text("office.room.receive-refused", refused));
     }
 
     private Node progress(Wording wording) {

@@ -68,7 +68,10 @@ public final class ReceivedRow extends HBox {
                 ActionButton button = new ActionButton(Weight.PRIMARY, wording.text("office.receive.trust"), () ->
                         trust.accept(turned));
                 button.setId("trust");
-                getChildren().add(button);
+                // Beside the words it would leave the fingerprint too little room to be compared.
+                HBox under = new HBox(button);
+                under.getStyleClass().add("under");
+                words.getChildren().add(under);
             }
         }
         receipt.ifPresent(this::receipt);

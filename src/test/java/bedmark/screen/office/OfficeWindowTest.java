@@ -165,6 +165,7 @@ class OfficeWindowTest {
             store.receive(List.of(packs.resolve("round-under-way.zip"), cut), "night", Progress.NONE);
         }
         try (OfficeWindow window = window(1280, 800)) {
+            assertTrue(window.words().contains("Receive (2)"), window.words());
             window.click("room-receive");
             String words = window.words();
             assertTrue(words.contains("Refused, and not in yet"), words);
@@ -177,6 +178,7 @@ class OfficeWindowTest {
             window.until(() -> !window.desk().store().packs().isEmpty());
             assertFalse(window.words().contains("aún no confía"), window.words());
             assertTrue(window.words().contains("cut.zip"), window.words());
+            assertTrue(window.words().contains("Recibir (1)"), window.words());
         }
     }
 

@@ -3,15 +3,10 @@ package bedmark.office.register;
 import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Node;
-import bedmark.document.Pointer;
 import bedmark.document.Refused;
-import bedmark.json.BundleReader;
-import bedmark.json.Canonical;
 import bedmark.office.register.Draft.Mapped;
 import bedmark.quantity.Unit;
 import java.util.ArrayList;
-import java.util.HashMap;
-import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
@@ -32,18 +27,9 @@ public final class RegisterImport {
 
     private final Meanings meanings;
     private final boolean emptying;
-    private final Map<String, Map<String, Branch>> held = new LinkedHashMap<>();
-    private final Map<String, Map<String, Branch>> lists = new LinkedHashMap<>();
-    private final RegisterProof proof = new RegisterProof(held, lists);
-    private final Map<String, Map<String, String>> places = new HashMap<>();
     private final List<Mapped> mapping = new ArrayList<>();
     private final List<Defect> defects = new ArrayList<>();
-    private final Set<String> roundsBegun = new LinkedHashSet<>();
-    private final Branch before;
-    private Optional<String> released = Optional.empty();
-    private int added;
-    private int changed;
-    private int same;
+    private final RegisterRows rows;
 
     /** A column that is taken in. */
     private record Taken(int index, Column column, Optional<Unit> unit, String head) {
@@ -51,15 +37,9 @@ public final class RegisterImport {
 
     /** @param emptying whether an empty cell empties what it stands for */
     private RegisterImport(Branch before, Meanings meanings, boolean emptying) {
-        this.before = before;
         this.meanings = meanings;
         this.emptying = emptying;
-        for (String list : Column.LISTS.keySet()) {
-            Map<String, Branch> rows = RegisterLists.of(before, list);
-            held.put(list, Map.copyOf(rows));
-            lists.put(list, rows);
-            places.put(list, new HashMap<>());
-        }
+        this.rows = new RegisterRows(before, defects);
     }
 
     /**
@@ -91,7 +71,7 @@ public final class RegisterImport {
                 .forEach(table -> work.defects.add(Defect.in(table.source(), "table-unknown", table.name(),
                         String.join(", ", Column.LISTS.keySet()))));
         work.requireUsed(tables);
-        return work.draft();
+        return work.rows.draft(work.mapping);
     }
 
     /** A name for a column that no table has, or of nothing that a table can hold, was mistyped. */
@@ -127,66 +107,18 @@ public final class RegisterImport {
             throw new Refused(Defect.in("", "register-changed-since"));
         }
         if (change.removal()) {
-            work.remove(list, row.map(grid::identity).orElseThrow());
-            return work.draft();
+            work.rows.remove(list, row.map(grid::identity).orElseThrow());
+            return work.rows.draft(work.mapping);
         }
         if (!list.equals(Column.ROUNDS)) {
-            work.reserve(grid, row);
+            work.rows.reserve(grid, row);
         }
         Table table = grid.edit(row.orElse(grid.rows().size()), change.cells());
         if (list.equals(Column.SEAL_RATES)) {
-            row.ifPresent(work::release);
+            row.ifPresent(work.rows::release);
         }
         work.take(table, list);
-        return work.draft();
-    }
-
-    /** What a change makes of a row must not be another row. */
-    private void reserve(RegisterGrid grid, Optional<Integer> but) {
-        for (int i = 0; i < grid.rows().size(); i++) {
-            if (!but.equals(Optional.of(i))) {
-                places.get(grid.list()).put(String.join(" ", grid.identity(i)), grid.list() + ":" + (i + 1));
-            }
-        }
-    }
-
-    private void remove(String list, List<String> identity) {
-        String id = list.equals(Column.ROUNDS) ? identity.get(0) : String.join(" ", identity);
-        String where = list + " " + String.join(" ", identity);
-        Map<String, Branch> rows = lists.get(list);
-        if (list.equals(Column.PLANT)) {
-            defects.add(Defect.in(where, "row-plant-stays"));
-            return;
-        }
-        Branch row = rows.remove(id);
-        if (list.equals(Column.ROUNDS)) {
-            List<Node> left = row.branches("points").stream().filter(point -> !point.text("transfer")
-                    .equals(Optional.of(identity.get(1)))).map(Node.class::cast).toList();
-            if (!left.isEmpty()) {
-                place(rows, id, row.with("points", new Node.Series(left)));
-            }
-        }
-        changed++;
-        proof.used(list, id, where).ifPresent(defects::add);
-    }
-
-    /** Takes a rate away before it comes back under another name, at the same place among the others. */
-    private void release(int row) {
-        Map<String, Branch> rates = lists.get(Column.SEAL_RATES);
-        List<Branch> typed = rates.values().stream().filter(rate -> rate.has("type")).toList();
-        released = Optional.of(RegisterLists.id(Column.SEAL_RATES, typed.get(row)));
-    }
-
-    private Draft draft() {
-        if (defects.isEmpty()) {
-            defects.addAll(proof.whole(places));
-        }
-        countRounds();
-        Branch made = RegisterLists.into(before, lists);
-        if (defects.isEmpty()) {
-            proveWhole(made);
-        }
-        return new Draft(before, made, mapping, defects, added, changed, same);
+        return work.rows.draft(work.mapping);
     }
 
     /** The list that a table holds; empty where it holds none. */
@@ -277,7 +209,7 @@ public final class RegisterImport {
             }
         }
         if (defects.size() == bad) {
-            put(list, read, emptied, place(table, row));
+            rows.put(list, read, emptied, place(table, row));
         }
     }
 
@@ -287,7 +219,7 @@ public final class RegisterImport {
         for (Taken taken : columns) {
             named = named.with(taken.column().key(), row.cells().get(taken.index()).text());
         }
-        return held.get(list).getOrDefault(RegisterLists.id(list, named), Branch.EMPTY);
+        return rows.before(list, RegisterLists.id(list, named));
     }
 
     private Branch read(Branch row, Branch old, Table.Cell cell, Taken taken, String where) {
@@ -299,121 +231,13 @@ public final class RegisterImport {
         }
         try {
             Node value = CellReader.read(cell, column.kind(), taken.unit());
-            if (column.kind() instanceof Kind.Reference reference && !lists.get(reference.list()).containsKey(text)) {
+            if (column.kind() instanceof Kind.Reference reference && !rows.has(reference.list(), text)) {
                 throw new CellReader.Unfit("cell-reference-unknown", text, reference.list());
             }
             return row.with(column.key(), value);
         } catch (CellReader.Unfit e) {
             defects.add(new Defect(e.code(), where, e.details()));
             return row;
-        }
-    }
-
-    private void put(String list, Branch row, Set<String> emptied, String where) {
-        String id = RegisterLists.id(list, row);
-        if (list.equals(Column.ROUNDS)) {
-            point(id, row, emptied, where);
-            return;
-        }
-        if (list.equals(Column.PLANT) && !lists.get(list).containsKey(id)) {
-            defects.add(Defect.in(where, "row-other-plant", id, String.join(", ", lists.get(list).keySet())));
-            return;
-        }
-        String twice = places.get(list).putIfAbsent(id, where);
-        if (twice != null) {
-            defects.add(Defect.in(where, "row-twice", id, twice));
-            return;
-        }
-        Branch old = released.map(before -> lists.get(list).get(before))
-                .orElseGet(() -> lists.get(list).getOrDefault(id, Branch.EMPTY));
-        Branch merged = old;
-        for (Map.Entry<String, Node> member : row.members().entrySet()) {
-            merged = saysTheSame(old, row, member.getKey()) ? merged
-                    : merged.with(member.getKey(), member.getValue());
-        }
-        for (String key : emptied) {
-            merged = merged.without(key);
-        }
-        count(old, merged);
-        List<Defect> wrong = merged.equals(old) ? List.of() : proof.row(list, merged, where);
-        defects.addAll(wrong);
-        if (wrong.isEmpty()) {
-            place(lists.get(list), id, merged);
-        }
-    }
-
-    private void place(Map<String, Branch> rows, String id, Branch row) {
-        if (released.isEmpty() || released.get().equals(id)) {
-            rows.put(id, row);
-            return;
-        }
-        Map<String, Branch> all = new LinkedHashMap<>(rows);
-        rows.clear();
-        all.forEach((key, other) -> rows.put(key.equals(released.get()) ? id : key,
-                key.equals(released.get()) ? row : other));
-    }
-
-    /** What is written the same keeps what else is known of it, such as how it was typed. */
-    private static boolean saysTheSame(Branch old, Branch row, String key) {
-        return old.has(key) && RegisterTables.cell(old, key).equals(RegisterTables.cell(row, key));
-    }
-
-    private void count(Branch old, Branch merged) {
-        if (old.equals(Branch.EMPTY)) {
-            added++;
-        } else if (old.equals(merged)) {
-            same++;
-        } else {
-            changed++;
-        }
-    }
-
-    private void point(String id, Branch row, Set<String> emptied, String where) {
-        Branch old = lists.get(Column.ROUNDS).getOrDefault(id, Branch.EMPTY.with("id", id));
-        Branch round = roundsBegun.add(id) ? old.with("points", new Node.Series(List.of())) : old;
-        List<Node> points = new ArrayList<>(round.series("points"));
-        String transfer = row.text("transfer").orElseThrow();
-        if (round.branches("points").stream().anyMatch(point -> point.text("transfer").equals(Optional.of(transfer)))) {
-            defects.add(Defect.in(where, "row-point-twice", transfer, id));
-            return;
-        }
-        points.add(pointBefore(id, transfer).orElse(Branch.EMPTY.with("transfer", transfer)));
-        Branch longer = round.with("points", new Node.Series(points));
-        for (String key : emptied) {
-            longer = longer.without(key);
-        }
-        lists.get(Column.ROUNDS).put(id, row.has("name")
-                ? longer.with("name", row.get("name").orElseThrow()) : longer);
-    }
-
-    /** A point that the round has already, with what else is known of it. */
-    private Optional<Branch> pointBefore(String round, String transfer) {
-        return held.get(Column.ROUNDS).getOrDefault(round, Branch.EMPTY).branches("points").stream()
-                .filter(point -> point.text("transfer").equals(Optional.of(transfer))).findFirst();
-    }
-
-    /** Rows of rounds are counted once their rounds are whole. */
-    private void countRounds() {
-        for (String id : roundsBegun) {
-            Branch old = held.get(Column.ROUNDS).getOrDefault(id, Branch.EMPTY);
-            Branch round = lists.get(Column.ROUNDS).getOrDefault(id, old);
-            List<Node> kept = round.series("points").stream().filter(old.series("points")::contains).toList();
-            added += round.series("points").size() - kept.size();
-            if (kept.equals(old.series("points")) && round.without("points").equals(old.without("points"))) {
-                same += kept.size();
-            } else {
-                changed += kept.size();
-            }
-        }
-    }
-
-    /** The whole must be what a bundle may hold. */
-    private void proveWhole(Branch head) {
-        try {
-            BundleReader.read(Canonical.bytes(head.with("format", "bedmark.bundle").with("version", Node.number(1))
-                    .with("surveys", new Node.Series(List.of()))));
-        } catch (Refused e) {
-            defects.add(e.defect().below(Pointer.ROOT));
         }
     }
 }

@@ -13,7 +13,6 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
@@ -64,12 +63,13 @@ final class OfficeActionCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        require(transfer.isEmpty() || change.isEmpty(),
+        Usage.require(spec, transfer.isEmpty() || change.isEmpty(),
                 "TRANSFER adds an action and --change changes one; give one of them");
-        require(transfer.isPresent() || change.isPresent() || !anythingGiven(),
+        Usage.require(spec, transfer.isPresent() || change.isPresent() || !anythingGiven(),
                 "name the TRANSFER that this is to be done at, or the action with --change");
-        require(transfer.isEmpty() || !done, "--done is about an action that is there; name it with --change");
-        finding.filter(code -> !code.isEmpty()).ifPresent(code -> require(Rule.ofCode(code).isPresent(),
+        Usage.require(spec, transfer.isEmpty() || !done,
+                "--done is about an action that is there; name it with --change");
+        finding.filter(code -> !code.isEmpty()).ifPresent(code -> Usage.require(spec, Rule.ofCode(code).isPresent(),
                 "--finding knows no rule '" + code + "'"));
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
@@ -95,11 +95,5 @@ final class OfficeActionCommand implements Callable<Integer> {
     private boolean anythingGiven() {
         return done || zones.given() || due.isPresent()
                 || Stream.of(text, finding, owner, workOrder).anyMatch(Optional::isPresent);
-    }
-
-    private void require(boolean met, String otherwise) {
-        if (!met) {
-            throw new ParameterException(spec.commandLine(), otherwise);
-        }
     }
 }

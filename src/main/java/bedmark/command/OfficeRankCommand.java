@@ -82,9 +82,10 @@ final class OfficeRankCommand implements Callable<Integer> {
                 new ParameterException(spec.commandLine(), "--units is metric or us, not '" + units + "'"));
         Optional<Rule> rule = finding.map(code -> Rule.ofCode(code).orElseThrow(() ->
                 new ParameterException(spec.commandLine(), "--finding knows no rule '" + code + "'")));
-        require(staleAfter >= 1, "--stale-after is a number of days from 1 on, not " + staleAfter);
-        limit.ifPresent(most -> require(most >= 1, "--limit is a number of zones from 1 on, not " + most));
-        olderThan.ifPresent(days -> require(days >= 0, "--older-than is a number of days from 0 on, not " + days));
+        Usage.require(spec, staleAfter >= 1, "--stale-after is a number of days from 1 on, not " + staleAfter);
+        limit.ifPresent(most -> Usage.require(spec, most >= 1, "--limit is a number of zones from 1 on, not " + most));
+        olderThan.ifPresent(days -> Usage.require(spec, days >= 0,
+                "--older-than is a number of days from 0 on, not " + days));
         RankQuery query = RankQuery.ALL.ofPlant(plant).ofArea(area).ofMaterial(material).with(rule)
                 .olderThan(olderThan.map(Duration::ofDays)).staleAfter(Duration.ofDays(staleAfter));
         List<RankedZone> ranked;
@@ -104,12 +105,6 @@ final class OfficeRankCommand implements Callable<Integer> {
         }
         surroundings.out().flush();
         return exitCode(ranked);
-    }
-
-    private void require(boolean met, String otherwise) {
-        if (!met) {
-            throw new ParameterException(spec.commandLine(), otherwise);
-        }
     }
 
     private static int exitCode(List<RankedZone> ranked) {

@@ -10,7 +10,6 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
@@ -52,9 +51,9 @@ final class OfficeSettleCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         boolean listing = transfer.isEmpty() && reason.isEmpty();
-        require(listing || side.isPresent() && reason.isPresent(),
+        Usage.require(spec, listing || side.isPresent() && reason.isPresent(),
                 "to decide a conflict give TRANSFER, SIDE and --reason; without all three the conflicts are listed");
-        require(listing || !json, "--json is for the list of conflicts; leave it away to decide one");
+        Usage.require(spec, listing || !json, "--json is for the list of conflicts; leave it away to decide one");
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
             if (listing) {
@@ -79,11 +78,5 @@ final class OfficeSettleCommand implements Callable<Integer> {
             new ConflictText(surroundings.wording()).print(waiting, surroundings.out());
         }
         surroundings.out().flush();
-    }
-
-    private void require(boolean met, String otherwise) {
-        if (!met) {
-            throw new ParameterException(spec.commandLine(), otherwise);
-        }
     }
 }

@@ -8,14 +8,11 @@ import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.sql.Connection;
-import java.sql.PreparedStatement;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.sql.Statement;
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.Properties;
 import org.h2.Driver;
@@ -37,10 +34,11 @@ final class Database implements AutoCloseable {
     private static final String SCHEMA = "schema.sql";
 
     private final Connection connection;
-    private final Map<String, PreparedStatement> statements = new HashMap<>();
+    private final Statements statements;
 
     private Database(Connection connection) {
         this.connection = connection;
+        this.statements = new Statements(connection, IndexBroken.class, IndexBroken::new);
     }
 
     /** Reads a row. */
@@ -136,9 +134,9 @@ final class Database implements AutoCloseable {
     }
 
     <T> List<T> rows(String sql, RowReader<T> reader, Object... arguments) {
-        return guarded(() -> {
+        return statements.guarded(() -> {
             List<T> rows = new ArrayList<>();
-            try (ResultSet result = prepared(sql, arguments).executeQuery()) {
+            try (ResultSet result = statements.with(sql, arguments).executeQuery()) {
                 while (result.next()) {
                     rows.add(reader.read(result));
                 }
@@ -148,56 +146,24 @@ final class Database implements AutoCloseable {
     }
 
     int run(String sql, Object... arguments) {
-        return guarded(() -> prepared(sql, arguments).executeUpdate());
+        return statements.run(sql, arguments);
     }
 
     /** Takes a row into the statement's batch. */
     void batch(String sql, Object... arguments) {
-        guarded(() -> {
-            PreparedStatement statement = prepared(sql, arguments);
-            statement.addBatch();
-            return statement;
-        });
+        statements.batch(sql, arguments);
     }
 
-    int[] runBatch(String sql) {
-        return guarded(() -> prepared(sql).executeBatch());
+    /** Runs what {@link #batch} took; nothing happens where it took nothing. */
+    void runBatch(String sql) {
+        statements.runBatch(sql);
     }
 
     void commit() {
-        guarded(() -> {
+        statements.guarded(() -> {
             connection.commit();
             return connection;
         });
-    }
-
-    /** Work on the database. */
-    @FunctionalInterface
-    private interface Work<T> {
-        T run() throws SQLException;
-    }
-
-    /** A damaged file makes the database, or whoever reads its rows, fail in ways that nobody wraps. */
-    private static <T> T guarded(Work<T> work) {
-        try {
-            return work.run();
-        } catch (IndexBroken e) {
-            throw e;
-        } catch (SQLException | RuntimeException | OutOfMemoryError | StackOverflowError e) {
-            throw new IndexBroken(e);
-        }
-    }
-
-    private PreparedStatement prepared(String sql, Object... arguments) throws SQLException {
-        PreparedStatement statement = statements.get(sql);
-        if (statement == null) {
-            statement = connection.prepareStatement(sql);
-            statements.put(sql, statement);
-        }
-        for (int i = 0; i < arguments.length; i++) {
-            statement.setObject(i + 1, arguments[i]);
-        }
-        return statement;
     }
 
     /** Closes cleanly; a database that can't be closed is noticed when it is opened. */

@@ -1,5 +1,6 @@
 package bedmark.index.office;
 
+import bedmark.index.Statements;
 import java.sql.Array;
 import java.sql.Connection;
 import java.sql.PreparedStatement;
@@ -7,9 +8,7 @@ import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.util.ArrayList;
 import java.util.Collection;
-import java.util.HashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.function.Supplier;
 
 /** One connection, used by one thread; every failure is an {@link OfficeBroken}. */
@@ -19,11 +18,12 @@ final class Link implements AutoCloseable {
     private static final int ANSWERS_WITHIN = 5;
 
     private final Connection connection;
-    private final Map<String, PreparedStatement> statements = new HashMap<>();
+    private final Statements statements;
 
     Link(Connection connection) {
         this.connection = connection;
-        guarded(() -> {
+        this.statements = new Statements(connection, OfficeBroken.class, OfficeBroken::new);
+        statements.guarded(() -> {
             connection.setAutoCommit(false);
             return true;
         });
@@ -48,8 +48,8 @@ final class Link implements AutoCloseable {
     }
 
     void each(String sql, RowTaker taker, Object... arguments) {
-        guarded(() -> {
-            PreparedStatement statement = prepared(sql, arguments);
+        statements.guarded(() -> {
+            PreparedStatement statement = statements.with(sql, arguments);
             statement.setFetchSize(FETCH);
             try (ResultSet result = statement.executeQuery()) {
                 while (result.next()) {
@@ -61,36 +61,29 @@ final class Link implements AutoCloseable {
     }
 
     int run(String sql, Object... arguments) {
-        return guarded(() -> prepared(sql, arguments).executeUpdate());
+        return statements.run(sql, arguments);
     }
 
     /** Takes a row into the statement's batch. */
     void batch(String sql, Object... arguments) {
-        guarded(() -> {
-            PreparedStatement statement = prepared(sql, arguments);
-            statement.addBatch();
-            return statement;
-        });
+        statements.batch(sql, arguments);
     }
 
     /** Runs what {@link #batch} took; nothing happens where it took nothing. */
     void runBatch(String sql) {
-        guarded(() -> {
-            PreparedStatement statement = statements.get(sql);
-            return statement == null ? new int[0] : statement.executeBatch();
-        });
+        statements.runBatch(sql);
     }
 
     /** Texts as one argument, each once. */
     Array texts(Collection<String> texts) {
-        return guarded(() -> connection.createArrayOf("varchar", texts.stream().distinct().toArray()));
+        return statements.guarded(() -> connection.createArrayOf("varchar", texts.stream().distinct().toArray()));
     }
 
     /** Does work whole, or not at all. */
     <T> T whole(Supplier<T> work) {
         try {
             T result = work.get();
-            guarded(() -> {
+            statements.guarded(() -> {
                 connection.commit();
                 return true;
             });
@@ -103,9 +96,7 @@ final class Link implements AutoCloseable {
 
     private void undo(Throwable failure) {
         try {
-            for (PreparedStatement statement : statements.values()) {
-                statement.clearBatch();
-            }
+            statements.clearBatches();
             connection.rollback();
         } catch (SQLException | RuntimeException e) {
             failure.addSuppressed(e);
@@ -121,42 +112,9 @@ final class Link implements AutoCloseable {
         }
     }
 
-    /** Work on the database. */
-    @FunctionalInterface
-    private interface Work<T> {
-        T run() throws SQLException;
-    }
-
-    /** A damaged file makes the database, or whoever reads its rows, fail in ways that nobody wraps. */
-    private static <T> T guarded(Work<T> work) {
-        try {
-            return work.run();
-        } catch (OfficeBroken e) {
-            throw e;
-        } catch (SQLException | RuntimeException | OutOfMemoryError | StackOverflowError e) {
-            throw new OfficeBroken(e);
-        }
-    }
-
-    private PreparedStatement prepared(String sql, Object... arguments) throws SQLException {
-        PreparedStatement statement = statements.get(sql);
-        if (statement == null) {
-            statement = connection.prepareStatement(sql);
-            statements.put(sql, statement);
-        }
-        for (int i = 0; i < arguments.length; i++) {
-            if (arguments[i] instanceof byte[] bytes) {
-                statement.setBytes(i + 1, bytes);
-            } else {
-                statement.setObject(i + 1, arguments[i]);
-            }
-        }
-        return statement;
-    }
-
     @Override
     public void close() {
-        guarded(() -> {
+        statements.guarded(() -> {
             connection.close();
             return true;
         });

@@ -1,5 +1,6 @@
 package bedmark.command;
 
+import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.wording.Wording;
 import java.nio.file.Files;
@@ -46,7 +47,11 @@ public final class BedmarkCommand implements Callable<Integer> {
      * @return its exit code
      */
     public static int run(Surroundings surroundings, String... arguments) {
-        return arguments.length == 0 ? open(surroundings) : execute(surroundings, arguments);
+        try {
+            return arguments.length == 0 ? open(surroundings) : execute(surroundings, arguments);
+        } catch (OutOfMemoryError e) {
+            return failed(surroundings, new Refused(Defect.in("", "memory-short"), e));
+        }
     }
 
     /** As the desktop starts it: there is no line to be read, and making ready for one would hold up the window. */
@@ -131,9 +136,15 @@ public final class BedmarkCommand implements Callable<Integer> {
 
     private static String sentence(Surroundings surroundings, Exception failure) {
         if (failure instanceof Misread misread) {
-            return Wording.plain(misread.file.toString()) + ": " + sentence(surroundings, misread.refused);
+            Defect defect = misread.refused.defect();
+            return about(misread.file, defect, surroundings.wording().sentence(defect));
         }
         return surroundings.wording().sentence(Refused.reason(failure));
+    }
+
+    /** A sentence that says which file it is about; one whose place is the file says so itself. */
+    static String about(Path file, Defect defect, String sentence) {
+        return defect.where().equals(file.toString()) ? sentence : Wording.plain(file.toString()) + ": " + sentence;
     }
 
     /** A refusal, and the file that it is about. */

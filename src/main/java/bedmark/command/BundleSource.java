@@ -4,6 +4,7 @@ import static bedmark.command.BedmarkCommand.in;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.json.JsonReader;
@@ -72,12 +73,12 @@ final class BundleSource {
                     .filter(file -> file.toString().endsWith(".json") || file.toString().endsWith(".zip"))
                     .sorted().toList();
         } catch (IOException e) {
-            throw new Refused(Defect.in(folder.toString(), "file-unreadable"), e);
+            throw new Refused(Defect.in(folder.toString(), "folder-unreadable"), e);
         }
     }
 
     private static Named one(Path file) throws Exception {
-        InputFile.requireFile(file);
+        NamedPath.requireFile(file);
         if (FileKind.isArchive(file)) {
             return in(file, () -> new Named(file,
                     new PackReader(PackLimits.STANDARD, BundleReader::read).open(file, Progress.NONE).bundle(),

@@ -3,12 +3,12 @@ package bedmark.command;
 import static bedmark.command.BedmarkCommand.in;
 
 import bedmark.document.Branch;
+import bedmark.journal.NamedPath;
 import bedmark.pack.FileKind;
 import bedmark.pack.ReceiptReader;
 import bedmark.pack.RoundFile;
 import bedmark.pack.SignedReceipt;
 import bedmark.survey.Register;
-import bedmark.wording.Wording;
 import java.nio.file.Path;
 
 /** Shows one file in a window of its own; without a display it says so and prints what is in the file. */
@@ -20,12 +20,12 @@ final class FileShowing {
     }
 
     int show(Path file) throws Exception {
-        InputFile.requireFile(file);
+        NamedPath.requireFile(file);
         if (surroundings.showing().show(file)) {
             return ExitCode.FINE;
         }
         FileKind kind = FileKind.of(file);
-        surroundings.out().println(surroundings.words().text("command.no-display-file"));
+        surroundings.say("command.no-display-file");
         return switch (kind) {
             case PACK -> PackVerifyCommand.verify(surroundings, file);
             case ROUND -> round(file);
@@ -36,27 +36,24 @@ final class FileShowing {
     private int round(Path file) throws Exception {
         RoundFile read = in(file, () -> RoundFile.read(file));
         Branch document = read.document();
-        say("command.file.round", file, named(document.branch("office").flatMap(one -> one.text("name")).orElse("")),
+        String office = document.branch("office").flatMap(one -> one.text("name")).orElse("");
+        surroundings.say("command.file.round", file, named(office),
                 document.branches("rounds").size(), new Register(document.branch("plant").orElseThrow()).name(),
                 read.fingerprint());
-        say("arrival.belongs.round", surroundings.words().text("office.take.button"));
+        surroundings.say("arrival.belongs.round", surroundings.words().text("office.take.button"));
         return ExitCode.FINE;
     }
 
     private int receipt(Path file) throws Exception {
         SignedReceipt read = in(file, () -> ReceiptReader.read(file));
-        say("command.file.receipt", file, named(read.receipt().office().name()), read.receipt().items().size(),
-                read.receipt().pack(), read.fingerprint());
-        say("arrival.belongs.receipt", surroundings.words().text("queue.read-receipts"),
+        surroundings.say("command.file.receipt", file, named(read.receipt().office().name()),
+                read.receipt().items().size(), read.receipt().pack(), read.fingerprint());
+        surroundings.say("arrival.belongs.receipt", surroundings.words().text("queue.read-receipts"),
                 surroundings.words().text("screen.queue.title"));
         return ExitCode.FINE;
     }
 
     private String named(String office) {
         return office.isBlank() ? surroundings.words().text("arrival.nameless") : office;
-    }
-
-    private void say(String key, Object... details) {
-        surroundings.out().println(Wording.plain(surroundings.words().text(key, details)));
     }
 }

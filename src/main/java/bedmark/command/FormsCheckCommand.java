@@ -1,5 +1,6 @@
 package bedmark.command;
 
+import bedmark.journal.NamedPath;
 import bedmark.json.FormsChecker;
 import java.nio.file.Path;
 import java.util.List;
@@ -23,7 +24,7 @@ final class FormsCheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        InputFile.requireFolder(folder);
+        NamedPath.requireFolder(folder);
         return report(FormsChecker.check(folder));
     }
 
@@ -31,7 +32,7 @@ final class FormsCheckCommand implements Callable<Integer> {
         findings.forEach(finding -> surroundings.err().println(place(finding)
                 + surroundings.wording().sentence(finding.defect())));
         if (findings.isEmpty()) {
-            surroundings.out().println(surroundings.words().text("command.forms.sound", folder));
+            surroundings.say("command.forms.sound", folder);
         }
         return findings.isEmpty() ? ExitCode.FINE : ExitCode.UNREADABLE;
     }

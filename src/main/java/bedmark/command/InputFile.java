@@ -2,34 +2,16 @@ package bedmark.command;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import bedmark.office.OfficeStore;
-import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 
 /** A file that the person named, read whole. */
 final class InputFile {
+    /** Far more than a bundle of a plant's whole history holds, and less than memory does (MiB). */
+    private static final int MOST = 256;
+
     private InputFile() {
-    }
-
-    /** Refuses what is no readable file, in words. */
-    static void requireFile(Path file) {
-        if (Files.isDirectory(file)) {
-            throw new Refused(Defect.in(file.toString(), "file-is-folder"));
-        }
-        if (!Files.exists(file)) {
-            throw new Refused(Defect.in(file.toString(), "file-absent"));
-        }
-        if (!Files.isReadable(file)) {
-            throw new Refused(Defect.in(file.toString(), "file-forbidden"));
-        }
-    }
-
-    /** Refuses what is no folder, in words. */
-    static void requireFolder(Path folder) {
-        if (!Files.isDirectory(folder)) {
-            throw new Refused(Defect.in(folder.toString(), "folder-absent"));
-        }
     }
 
     /**
@@ -43,13 +25,8 @@ final class InputFile {
         }
     }
 
-    /** The bytes of a file; refused in words where it is not there, no file, or not readable. */
+    /** The bytes of a file; refused in words where it is not there, no file, too large, or not readable. */
     static byte[] read(Path file) {
-        requireFile(file);
-        try {
-            return Files.readAllBytes(file);
-        } catch (IOException e) {
-            throw new Refused(Defect.in(file.toString(), "file-unreadable"), e);
-        }
+        return NamedPath.read(file, MOST);
     }
 }

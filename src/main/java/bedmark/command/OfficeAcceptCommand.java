@@ -73,8 +73,8 @@ final class OfficeAcceptCommand implements Callable<Integer> {
                         desk.person(), until, LocalDate.now(surroundings.clock()));
             }
             progress.done();
-            surroundings.out().println(surroundings.words().text("office.accept." + outcome(), transfer,
-                    surroundings.words().text("rule." + rule), until.map(LocalDate::toString).orElse("")));
+            surroundings.say("office.accept." + outcome(), transfer,
+                    surroundings.words().text("rule." + rule), until.map(LocalDate::toString).orElse(""));
         }
         return ExitCode.FINE;
     }

@@ -2,6 +2,7 @@ package bedmark.command;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import bedmark.office.OfficeOptions;
 import bedmark.office.OfficeProof;
 import bedmark.office.OfficeStore;
@@ -32,11 +33,11 @@ final class OfficeCheckCommand implements Callable<Integer> {
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             proof = OfficeProof.of(folder, OfficeOptions.of(surroundings.clock()).withProgress(progress::at));
         }
-        surroundings.out().println(surroundings.words().text("command.office.counts", proof.packs(), proof.rows()));
+        surroundings.say("command.office.counts", proof.packs(), proof.rows());
         proof.defects().forEach(defect -> surroundings.err().println("bedmark: "
                 + surroundings.wording().sentence(defect)));
         if (proof.defects().isEmpty()) {
-            surroundings.out().println(surroundings.words().text("command.office.sound", folder));
+            surroundings.say("command.office.sound", folder);
         }
         return proof.defects().isEmpty() ? ExitCode.FINE : ExitCode.UNREADABLE;
     }
@@ -44,6 +45,7 @@ final class OfficeCheckCommand implements Callable<Integer> {
     /** An office that is not there is not made by looking at it. */
     static void require(Path folder) {
         if (!OfficeStore.isOffice(folder)) {
+            NamedPath.requireFolder(folder);
             throw new Refused(Defect.in(folder.toString(), "office-absent"));
         }
     }

@@ -32,7 +32,7 @@ final class OfficeExportCommand implements Callable<Integer> {
                 progress)) {
             long surveys = new OfficeExport(store).write(out, progress::at);
             progress.done();
-            surroundings.out().println(surroundings.words().text("office.exported", out, surveys));
+            surroundings.say("office.exported", out, surveys);
         }
         return ExitCode.FINE;
     }

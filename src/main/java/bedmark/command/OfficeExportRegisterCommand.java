@@ -46,7 +46,7 @@ final class OfficeExportRegisterCommand implements Callable<Integer> {
                 Files.writeString(out.resolve(file.getKey()), file.getValue());
             }
             progress.done();
-            surroundings.out().println(surroundings.words().text("office.register.written", out, files.size()));
+            surroundings.say("office.register.written", out, files.size());
             return ExitCode.FINE;
         } catch (IOException e) {
             throw new Refused(Defect.in(out.toString(), "export-not-saved", String.valueOf(e.getMessage())), e);

@@ -3,6 +3,7 @@ package bedmark.command;
 import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import bedmark.json.JsonReader;
 import bedmark.office.OfficeStore;
 import bedmark.office.register.Draft;
@@ -79,8 +80,8 @@ final class OfficeImportRegisterCommand implements Callable<Integer> {
             if (!check) {
                 register.take(draft, "import", desk.person());
             }
-            surroundings.out().println(surroundings.words().text(check ? "office.import.would" : "office.import.done",
-                    draft.added(), draft.changed(), draft.same()));
+            surroundings.say(check ? "office.import.would" : "office.import.done",
+                    draft.added(), draft.changed(), draft.same());
         }
         return ExitCode.FINE;
     }
@@ -95,12 +96,13 @@ final class OfficeImportRegisterCommand implements Callable<Integer> {
         List<Path> files = new ArrayList<>();
         for (Path input : inputs) {
             if (Files.isDirectory(input)) {
+                NamedPath.requireFolder(input);
                 try (Stream<Path> held = Files.list(input)) {
                     held.filter(file -> file.getFileName().toString().toLowerCase(Locale.ROOT)
                             .matches(".*\\.(csv|xlsx)")).sorted().forEach(files::add);
                 }
             } else {
-                InputFile.requireFile(input);
+                NamedPath.requireFile(input);
                 files.add(input);
             }
         }

@@ -1,6 +1,7 @@
 package bedmark.command;
 
 import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import bedmark.office.OfficeStore;
 import bedmark.office.PackFolder;
 import bedmark.office.Received;
@@ -58,7 +59,7 @@ final class OfficeReceiveCommand implements Callable<Integer> {
         List<Path> files = new ArrayList<>();
         packs.forEach(pack -> files.addAll(held(pack)));
         if (receipts != null) {
-            InputFile.requireFolder(receipts);
+            NamedPath.requireFolder(receipts);
         }
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
@@ -88,8 +89,7 @@ final class OfficeReceiveCommand implements Callable<Integer> {
 
     private void tell(OfficeStore store, Received received) {
         if (received instanceof Received.Turned turned) {
-            surroundings.err().println("bedmark: " + Wording.plain(turned.file() + ": ")
-                    + new RefusalText(surroundings.wording()).reason(turned));
+            surroundings.err().println("bedmark: " + new RefusalText(surroundings.wording()).about(turned));
             return;
         }
         if (received instanceof Received.Taken taken) {

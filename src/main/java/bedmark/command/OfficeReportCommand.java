@@ -90,7 +90,7 @@ final class OfficeReportCommand implements Callable<Integer> {
                 throw stopped();
             }
             progress.done();
-            surroundings.out().println(surroundings.words().text("report.written", out, content.zones().size()));
+            surroundings.say("report.written", out, content.zones().size());
         }
         return ExitCode.FINE;
     }

@@ -65,7 +65,7 @@ final class OfficeSettleCommand implements Callable<Integer> {
                 new Findings(store).settle(zones.zone(store, transfer.get()), side.get(), reason.get(),
                         desk.person());
                 progress.done();
-                surroundings.out().println(surroundings.words().text("office.settled", transfer.get(), side.get()));
+                surroundings.say("office.settled", transfer.get(), side.get());
             }
         }
         return ExitCode.FINE;

@@ -54,7 +54,7 @@ final class OpenCommand implements Callable<Integer> {
         if (surroundings.opening().open(store, samples, demo)) {
             return ExitCode.FINE;
         }
-        surroundings.out().println(surroundings.words().text("command.no-display"));
+        surroundings.say("command.no-display");
         surroundings.out().println();
         new AssessCommand(surroundings).assess(samples.orElseThrow(() ->
                 new Refused(Defect.in("", "home-absent"))).resolve(SAMPLE_ROUND));

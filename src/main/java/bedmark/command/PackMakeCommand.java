@@ -1,5 +1,6 @@
 package bedmark.command;
 
+import bedmark.journal.NamedPath;
 import bedmark.json.BundleReader;
 import bedmark.pack.DeviceKey;
 import bedmark.pack.PackWriter;
@@ -41,21 +42,21 @@ final class PackMakeCommand implements Callable<Integer> {
     public Integer call() throws Exception {
         byte[] text = InputFile.read(bundle);
         Bundle read = BedmarkCommand.in(bundle, () -> BundleReader.read(text));
-        InputFile.requireFolder(photos);
+        NamedPath.requireFolder(photos);
         if (!Files.isDirectory(out)) {
-            InputFile.requireFolder(out.toAbsolutePath().normalize().getParent());
+            NamedPath.requireFolder(out.toAbsolutePath().normalize().getParent());
         }
         Path keys = store.orElseGet(OpenCommand::ownStore);
         if (Files.exists(keys)) {
-            InputFile.requireFolder(keys);
+            NamedPath.requireFolder(keys);
         }
         DeviceKey key = DeviceKey.of(keys);
         WrittenPack written;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             written = PackWriter.write(read, PhotoSource.folder(photos), key, out, progress::at);
         }
-        surroundings.out().println(surroundings.words().text("command.pack.made", written.file(),
-                read.surveys().size(), written.photos(), written.sha256(), written.fingerprint()));
+        surroundings.say("command.pack.made", written.file(),
+                read.surveys().size(), written.photos(), written.sha256(), written.fingerprint());
         return ExitCode.FINE;
     }
 }

@@ -1,5 +1,6 @@
 package bedmark.command;
 
+import bedmark.journal.NamedPath;
 import bedmark.json.BundleReader;
 import bedmark.pack.PackLimits;
 import bedmark.pack.PackReader;
@@ -25,7 +26,7 @@ final class PackVerifyCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
-        InputFile.requireFile(pack);
+        NamedPath.requireFile(pack);
         return verify(surroundings, pack);
     }
 
@@ -35,8 +36,8 @@ final class PackVerifyCommand implements Callable<Integer> {
             read = BedmarkCommand.in(pack, () ->
                     new PackReader(PackLimits.STANDARD, BundleReader::read).open(pack, progress::at));
         }
-        surroundings.out().println(surroundings.words().text("command.pack.sound", pack,
-                read.bundle().surveys().size(), read.photos().size(), read.fingerprint()));
+        surroundings.say("command.pack.sound", pack,
+                read.bundle().surveys().size(), read.photos().size(), read.fingerprint());
         return ExitCode.FINE;
     }
 }

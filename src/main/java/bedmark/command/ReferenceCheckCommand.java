@@ -1,9 +1,7 @@
 package bedmark.command;
 
-import bedmark.document.Defect;
-import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import bedmark.json.ReferenceData;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
@@ -26,14 +24,12 @@ final class ReferenceCheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        if (!Files.isDirectory(folder)) {
-            throw new Refused(Defect.in(folder.toString(), "folder-absent"));
-        }
+        NamedPath.requireFolder(folder);
         List<ReferenceData.Finding> findings = ReferenceData.check(folder);
         findings.forEach(finding -> surroundings.err().println(place(finding)
                 + surroundings.wording().sentence(finding.defect())));
         if (findings.isEmpty()) {
-            surroundings.out().println(surroundings.words().text("command.reference.sound", folder));
+            surroundings.say("command.reference.sound", folder);
         }
         return findings.isEmpty() ? ExitCode.FINE : ExitCode.UNREADABLE;
     }

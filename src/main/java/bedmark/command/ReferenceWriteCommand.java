@@ -1,6 +1,7 @@
 package bedmark.command;
 
 import bedmark.json.ReferenceData;
+import bedmark.wording.Wording;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -23,7 +24,8 @@ final class ReferenceWriteCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        ReferenceData.write(folder).forEach(surroundings.out()::println);
+        ReferenceData.write(folder).forEach(file ->
+                surroundings.out().println(Wording.plain(file.toString())));
         return ExitCode.FINE;
     }
 }

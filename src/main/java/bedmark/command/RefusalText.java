@@ -29,11 +29,15 @@ final class RefusalText {
         return Wording.plain(line.toString());
     }
 
+    /** The same, with the file that it is about. */
+    String about(Received.Turned turned) {
+        return BedmarkCommand.about(turned.file(), turned.why(), reason(turned));
+    }
+
     String line(Refusal refusal) {
         String again = refusal.first().equals(refusal.last()) ? ""
                 : " " + wording.text("office.refused.first", wording.moment(refusal.first()));
-        return Wording.plain(wording.moment(refusal.last()) + ", " + refusal.turned().file() + ": "
-                + reason(refusal.turned()) + again);
+        return Wording.plain(wording.moment(refusal.last()) + ", " + about(refusal.turned()) + again);
     }
 
     String json(Refusal refusal) {

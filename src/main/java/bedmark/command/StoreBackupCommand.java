@@ -2,6 +2,7 @@ package bedmark.command;
 
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
+import bedmark.journal.NamedPath;
 import bedmark.survey.LevelWord;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
@@ -34,9 +35,9 @@ final class StoreBackupCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        InputFile.requireFolder(folder);
+        NamedPath.requireFolder(folder);
         InputFile.requireNoOffice(folder, "backup");
-        InputFile.requireFolder(target);
+        NamedPath.requireFolder(target);
         StoreOptions options = StoreOptions.of("tablet").withClock(surroundings.clock())
                 .withLevels(new LevelWord()::of).withPassphrase(passphrase.of(folder, surroundings));
         Path made;
@@ -44,7 +45,7 @@ final class StoreBackupCommand implements Callable<Integer> {
              ProgressLine progress = new ProgressLine(surroundings)) {
             made = store.backup(target, "", progress::at);
         }
-        surroundings.out().println(surroundings.words().text("store.backed-up", made));
+        surroundings.say("store.backed-up", made);
         return ExitCode.FINE;
     }
 }

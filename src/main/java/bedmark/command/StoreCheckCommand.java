@@ -4,6 +4,7 @@ import bedmark.index.Store;
 import bedmark.index.StoreCheck;
 import bedmark.index.StoreFacts;
 import bedmark.journal.FileLayer;
+import bedmark.journal.NamedPath;
 import bedmark.wording.Wording;
 import bedmark.words.Words;
 import java.nio.file.Path;
@@ -34,20 +35,21 @@ final class StoreCheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        NamedPath.requireFolder(folder);
         InputFile.requireNoOffice(folder, "check");
         StoreCheck check;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             check = Store.check(folder, FileLayer.disk(), passphrase.of(folder, surroundings), progress::at);
         }
-        surroundings.out().println(surroundings.words().text("command.store.counts", check.segments(),
-                check.entries(), check.photos()));
+        surroundings.say("command.store.counts", check.segments(),
+                check.entries(), check.photos());
         tell(check.facts());
         check.torn().forEach(file ->
-                surroundings.out().println(surroundings.words().text("command.store.torn", file)));
+                surroundings.say("command.store.torn", file));
         check.defects().forEach(defect -> surroundings.err().println("bedmark: "
                 + surroundings.wording().sentence(defect)));
         if (check.sound()) {
-            surroundings.out().println(surroundings.words().text("command.store.sound", folder));
+            surroundings.say("command.store.sound", folder);
         }
         return check.sound() ? ExitCode.FINE : ExitCode.UNREADABLE;
     }

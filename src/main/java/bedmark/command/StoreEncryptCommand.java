@@ -56,9 +56,9 @@ final class StoreEncryptCommand implements Callable<Integer> {
                 new StoreFolder(folder, options.withProgress(progress::at)).seal(passphrase);
             }
         }
-        surroundings.out().println(surroundings.words().text(change ? "store.passphrase.changed" : "store.encrypted",
-                folder));
-        surroundings.out().println(surroundings.words().text("store.unlock.lost"));
+        surroundings.say(change ? "store.passphrase.changed" : "store.encrypted",
+                folder);
+        surroundings.say("store.unlock.lost");
         return ExitCode.FINE;
     }
 

@@ -2,6 +2,7 @@ package bedmark.command;
 
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
+import bedmark.journal.NamedPath;
 import bedmark.survey.LevelWord;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
@@ -27,6 +28,7 @@ final class StoreRebuildCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        NamedPath.requireFolder(folder);
         InputFile.requireNoOffice(folder, "rebuild");
         long entries;
         try (ProgressLine progress = new ProgressLine(surroundings)) {
@@ -34,7 +36,7 @@ final class StoreRebuildCommand implements Callable<Integer> {
                     .withLevels(new LevelWord()::of).withPassphrase(passphrase.of(folder, surroundings))
                     .withProgress(progress::at));
         }
-        surroundings.out().println(surroundings.words().text("command.store.rebuilt", folder, entries));
+        surroundings.say("command.store.rebuilt", folder, entries);
         return ExitCode.FINE;
     }
 }

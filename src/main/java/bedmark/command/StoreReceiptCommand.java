@@ -3,6 +3,7 @@ package bedmark.command;
 import bedmark.dispatch.ReceiptBook;
 import bedmark.index.Store;
 import bedmark.index.StoreOptions;
+import bedmark.journal.NamedPath;
 import bedmark.pack.Fingerprint;
 import bedmark.pack.ReceiptReader;
 import bedmark.pack.SignedReceipt;
@@ -51,7 +52,7 @@ final class StoreReceiptCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
-        InputFile.requireFolder(folder);
+        NamedPath.requireFolder(folder);
         InputFile.requireNoOffice(folder, "receipt");
         Set<Fingerprint> vouched = new HashSet<>();
         for (String typed : trusted) {
@@ -68,9 +69,9 @@ final class StoreReceiptCommand implements Callable<Integer> {
                     book.requireTrusted(signed, vouched);
                     return book.note(signed, "");
                 });
-                surroundings.out().println(surroundings.words().text("queue.receipt", Wording.plain(
+                surroundings.say("queue.receipt", Wording.plain(
                         OfficeNameCommand.named(surroundings, outcome.receipt().office().name())),
-                        outcome.received().size(), outcome.known().size()));
+                        outcome.received().size(), outcome.known().size());
                 if (!outcome.differing().isEmpty()) {
                     surroundings.err().println("bedmark: " + surroundings.words().text("queue.receipt-differs",
                             outcome.differing().size()));

@@ -3,6 +3,7 @@ package bedmark.command;
 import bedmark.index.Restored;
 import bedmark.index.StoreFolder;
 import bedmark.index.StoreOptions;
+import bedmark.journal.NamedPath;
 import bedmark.survey.LevelWord;
 import bedmark.vault.Passphrase;
 import java.nio.file.Path;
@@ -41,7 +42,7 @@ final class StoreRestoreCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        InputFile.requireFolder(backup);
+        NamedPath.requireFolder(backup);
         InputFile.requireNoOffice(folder, "restore");
         StoreOptions options = StoreOptions.of("tablet").withClock(surroundings.clock())
                 .withLevels(new LevelWord()::of);
@@ -56,8 +57,8 @@ final class StoreRestoreCommand implements Callable<Integer> {
             restored = new StoreFolder(folder, options.withProgress(progress::at)
                     .withPassphrase(sealed ? given : Optional.empty())).restore(backup, ofBackup, "");
         }
-        surroundings.out().println(surroundings.words().text(restored.fresh() ? "store.restored" : "store.taken-over",
-                restored.taken().size(), restored.known().size(), folder));
+        surroundings.say(restored.fresh() ? "store.restored" : "store.taken-over",
+                restored.taken().size(), restored.known().size(), folder);
         if (!restored.differing().isEmpty()) {
             surroundings.err().println("bedmark: "
                     + surroundings.words().text("store.differing", restored.differing().size()));

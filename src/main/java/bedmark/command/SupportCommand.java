@@ -6,6 +6,7 @@ import bedmark.document.Refused;
 import bedmark.index.Store;
 import bedmark.index.StoreCheck;
 import bedmark.journal.FileLayer;
+import bedmark.journal.NamedPath;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -42,6 +43,7 @@ final class SupportCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws IOException {
+        NamedPath.requireFolder(folder);
         InputFile.requireNoOffice(folder, "support");
         List<String> lines = new ArrayList<>();
         lines.add("bedmark " + ProgramVersion.number());
@@ -67,7 +69,7 @@ final class SupportCommand implements Callable<Integer> {
         } catch (IOException e) {
             throw new Refused(Defect.in("", "file-unwritable", out.toString()));
         }
-        surroundings.out().println(surroundings.words().text("command.support.written", out));
+        surroundings.say("command.support.written", out);
         return ExitCode.FINE;
     }
 }

@@ -27,6 +27,11 @@ public record Surroundings(PrintWriter out, PrintWriter err, Optional<Path> home
         return new Wording(words, UnitSystem.METRIC);
     }
 
+    /** Prints a text in one line, whatever a path or a name in it holds. */
+    void say(String key, Object... details) {
+        out.println(Wording.plain(words.text(key, details)));
+    }
+
     /** Opens the app and returns when it is closed. */
     @FunctionalInterface
     public interface Opening {

@@ -68,7 +68,7 @@ public final class FormsChecker {
         String file = path.getFileName().toString();
         Document document;
         try {
-            document = JsonReader.read(Files.readAllBytes(path));
+            document = JsonFile.read(path);
         } catch (IOException e) {
             findings.add(new Finding(file, 1, 1, "", Defect.in(file, "file-unreadable")));
             return;

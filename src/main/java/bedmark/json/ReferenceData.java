@@ -92,7 +92,7 @@ public final class ReferenceData {
     private static Optional<Document> read(ReferenceFile file, Path path, List<Finding> findings) {
         String name = file.fileName();
         try {
-            Document document = JsonReader.read(Files.readAllBytes(path));
+            Document document = JsonFile.read(path);
             List<Defect> defects = ReferenceCheck.check(file, document);
             defects.forEach(defect -> findings.add(finding(name, document, defect)));
             return defects.isEmpty() ? Optional.of(document) : Optional.empty();

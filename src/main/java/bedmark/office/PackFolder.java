@@ -2,6 +2,7 @@ package bedmark.office;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
@@ -39,14 +40,15 @@ public final class PackFolder {
     /**
      * The packs that a folder holds now, by name.
      *
-     * @throws Refused {@code folder-absent} where it can't be read
+     * @throws Refused {@code folder-absent}, {@code folder-is-file}, {@code folder-unreadable}
      */
     public static List<Path> packs(Path folder) {
+        NamedPath.requireFolder(folder);
         try (Stream<Path> files = Files.list(folder)) {
             return files.filter(file -> file.getFileName().toString().toLowerCase(Locale.ROOT).endsWith(ENDING)
                     && Files.isRegularFile(file)).sorted().toList();
         } catch (IOException | UncheckedIOException e) {
-            throw new Refused(Defect.in(folder.toString(), "folder-absent"), e);
+            throw new Refused(Defect.in(folder.toString(), "folder-unreadable"), e);
         }
     }
 
@@ -54,7 +56,7 @@ public final class PackFolder {
      * The packs that came or changed since they were given out, and are no longer being written: those that look the
      * same as when they were last looked at.
      *
-     * @throws Refused {@code folder-absent}
+     * @throws Refused as {@link #packs}
      */
     public synchronized List<Path> look() {
         Map<Path, Look> now = new HashMap<>();

@@ -5,6 +5,7 @@ import bedmark.document.Refused;
 import bedmark.journal.Digest;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
+import bedmark.journal.NamedPath;
 import java.io.FileInputStream;
 import java.io.IOException;
 import java.io.InputStream;
@@ -57,7 +58,7 @@ final class PackShelf {
     /**
      * Copies a pack beside the others, forced, under a name of its own.
      *
-     * @throws Refused {@code pack-absent}, {@code pack-unreadable}, {@code store-…}
+     * @throws Refused those of {@link NamedPath#requirePlainFile}, {@code pack-unreadable}, {@code store-…}
      */
     Laid lay(Path source) {
         Path part = folder.resolve(UUID.randomUUID() + PART);
@@ -82,10 +83,11 @@ final class PackShelf {
     }
 
     private static InputStream open(Path source) {
+        NamedPath.requirePlainFile(source);
         try {
             return new FileInputStream(source.toFile());
         } catch (IOException e) {
-            throw new Refused(Defect.in(source.toString(), "pack-absent"), e);
+            throw new Refused(Defect.in(source.toString(), "pack-unreadable", "read"), e);
         }
     }
 

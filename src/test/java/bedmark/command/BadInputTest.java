@@ -5,7 +5,10 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.command.Terminal.Result;
+import bedmark.index.Store;
+import bedmark.index.StoreOptions;
 import java.io.IOException;
+import java.io.RandomAccessFile;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -121,6 +124,66 @@ class BadInputTest {
         assertFalse(printed.contains("\u001b"), printed);
     }
 
+    /** A file that announces more than memory holds, and takes no room on the disk. */
+    private Path huge(String name) throws IOException {
+        Path file = temp.resolve(name);
+        try (RandomAccessFile made = new RandomAccessFile(file.toFile(), "rw")) {
+            made.setLength(3L << 30);
+        }
+        return file;
+    }
+
+    @Test
+    void fileThatIsTooLargeIsSaidSoBeforeMemoryEnds() throws IOException {
+        Path file = huge("round.json");
+        assertSentence(Terminal.run("assess", file.toString()), file + ": the file is larger than 256 MB");
+        Path form = huge("forms.json");
+        Result checked = Terminal.run("forms", "check", temp.toString());
+        assertEquals(ExitCode.UNREADABLE, checked.code());
+        assertTrue(checked.err().contains(form.getFileName() + ": the file is larger than 64 MB"), checked.err());
+        assertTrue(Terminal.run("reference", "check", temp.toString()).err().contains("this name is not one"));
+        huge("limits.json");
+        assertTrue(Terminal.run("reference", "check", temp.toString()).err().contains("larger than 64 MB"));
+    }
+
+    @Test
+    void shortMemoryIsSaidInOneSentence() {
+        assertSentence(Terminal.run(file -> {
+            throw new OutOfMemoryError();
+        }, BUNDLE), "not enough memory");
+    }
+
+    @Test
+    void fileInThePlaceOfAFolderIsSaidToBeOne() throws IOException {
+        String plain = Files.createFile(temp.resolve("plain")).toString();
+        String[][] lines = {{"forms", "check", plain}, {"reference", "check", plain}, {"store", "check", plain},
+            {"store", "rebuild", plain}, {"office", "check", plain}, {"support", plain, "--out", plain + "2"},
+            {"store", "backup", plain, "--to", temp.toString()}, {"store", "receipt", plain, plain},
+            {"store", "restore", plain, "--to", plain + "2"}};
+        for (String[] line : lines) {
+            assertSentence(Terminal.run(line), plain + ": this is a file; name a folder");
+        }
+    }
+
+    @Test
+    void pathIsSaidOnceAndInOneLine() throws IOException {
+        Path pack = Files.createFile(temp.resolve("ma\nrch \u00e9.zip"));
+        Result read = Terminal.run("pack", "verify", pack.toString());
+        assertSentence(read, "ma rch \u00e9.zip: The file is no ZIP file");
+        Path receipt = temp.resolve("none.receipt.json");
+        String store = temp.resolve("store").toString();
+        Store.open(Path.of(store), StoreOptions.of("tablet")).close();
+        Result absent = Terminal.run("store", "receipt", store, receipt.toString());
+        assertSentence(absent, "There is no receipt file " + receipt);
+        assertEquals(absent.err().indexOf(receipt.toString()), absent.err().lastIndexOf(receipt.toString()));
+        Path folder = Files.createDirectory(temp.resolve("li\nne"));
+        assertEquals(1, Terminal.run("reference", "check", folder.toString()).err().lines().count());
+        Result written = Terminal.run("reference", "write", folder.toString());
+        assertEquals(10, written.out().lines().count(), written.out());
+        Result sound = Terminal.run("reference", "check", folder.toString());
+        assertEquals(1, sound.out().lines().count(), sound.out());
+    }
+
     @Test
     void packIsMadeFromFoldersThatAreThere() throws IOException {
         String nowhere = temp.resolve("nowhere").toString();
@@ -129,6 +192,6 @@ class BadInputTest {
                 temp.resolve("store").toString()), nowhere + ": there is no such folder");
         Path plain = Files.createFile(temp.resolve("plain"));
         assertSentence(Terminal.run("pack", "make", BUNDLE, "--photos", temp.toString(), "--out", out, "--store",
-                plain.toString()), plain + ": there is no such folder");
+                plain.toString()), plain + ": this is a file; name a folder");
     }
 }

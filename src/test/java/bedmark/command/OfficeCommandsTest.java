@@ -14,6 +14,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.regex.Matcher;
@@ -408,6 +409,36 @@ class OfficeCommandsTest {
         Result result = office("receive", empty.toString());
         assertEquals(0, result.code(), result::err);
         assertTrue(result.out().contains(empty + ": there were no packs"), result::out);
+    }
+
+    @Test
+    void whatIsNoPackFileIsRefusedForWhatItIs() throws IOException {
+        Path absent = folder.resolve("none.zip");
+        Path plain = Files.createFile(folder.resolve("plain"));
+        for (String[] given : new String[][] {{absent.toString(), absent + ": there is no such file; check the path."},
+            {"/dev/null", "/dev/null: this is a device or a pipe and no file; name a file."},
+            {plain.toString(), plain + ": The file is no ZIP file and so no pack; choose a pack."}}) {
+            Result refused = office("receive", given[0]);
+            assertEquals(3, refused.code());
+            assertEquals("bedmark: " + given[1] + System.lineSeparator(), refused.err());
+            assertEquals("", refused.out());
+        }
+        Result beside = office("receive", packs.toString(), "--receipts", plain.toString());
+        assertTrue(beside.err().contains(plain + ": this is a file; name a folder."), beside::err);
+    }
+
+    @Test
+    void aWorkbookThatIsCutOffIsSaidToBeNone() throws IOException {
+        received();
+        Path whole = folder.resolve("report.xlsx");
+        assertEquals(0, office("report", "--out", whole.toString()).code());
+        byte[] bytes = Files.readAllBytes(whole);
+        for (int length : new int[] {0, 1, bytes.length / 2}) {
+            Path cut = Files.write(folder.resolve("cut.xlsx"), Arrays.copyOf(bytes, length));
+            Result refused = office("import-register", cut.toString());
+            assertEquals(3, refused.code());
+            assertTrue(refused.err().contains("cut.xlsx is no workbook that can be read"), refused::err);
+        }
     }
 
     @Test

@@ -27,7 +27,7 @@ import org.junit.jupiter.api.Test;
 
 /** Whatever code names in words has its words, in both languages. */
 class EveryWordTest {
-    private static final Pattern KEY = Pattern.compile("[tT]ext\\(\\s*\"([a-z]+\\.[a-z0-9.-]+)\"\\s*[,)]");
+    private static final Pattern KEY = Pattern.compile("(?:[tT]ext|say)\\(\\s*\"([a-z]+\\.[a-z0-9.-]+)\"\\s*[,)]");
     private static final Pattern DEFECT =
             Pattern.compile("(?:Defect\\.(?:at|in)\\([^;]*?|ImpossibleReading\\()\"([a-z0-9]+(?:-[a-z0-9]+)+)\"");
     private static final Pattern ASSUMPTION = Pattern.compile("Assumption\\.of\\(\"([a-z-]+)\"");

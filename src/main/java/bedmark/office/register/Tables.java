@@ -5,6 +5,7 @@ import bedmark.document.Refused;
 import bedmark.office.Csv;
 import bedmark.office.register.Table.Cell;
 import bedmark.office.register.Table.Row;
+import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.StringReader;
@@ -30,7 +31,7 @@ import org.dhatim.fastexcel.reader.Sheet;
 
 /** Reads tables: CSV with commas, semicolons or tabs, and workbooks. */
 public final class Tables {
-    private static final long LARGEST = 64L << 20;
+    private static final int LARGEST = 64 << 20;
     private static final MathContext WORKBOOK_DIGITS = new MathContext(15);
     private static final Pattern LONG_FRACTION = Pattern.compile("-?[0-9]*\\.[0-9]{10,}(?:E[+-]?[0-9]{1,3})?");
 
@@ -44,15 +45,23 @@ public final class Tables {
      */
     public static List<Table> read(Path file) {
         String name = file.getFileName().toString();
+        byte[] bytes = bytes(file, name);
         try {
-            if (Files.size(file) > LARGEST) {
-                throw new Refused(Defect.in(name, "table-too-large", Long.toString(LARGEST >> 20)));
-            }
-            if (name.toLowerCase(Locale.ROOT).endsWith(".xlsx")) {
-                return workbook(file, name);
-            }
-            return List.of(csv(Files.readAllBytes(file), name));
+            return name.toLowerCase(Locale.ROOT).endsWith(".xlsx") ? workbook(bytes, name)
+                    : List.of(csv(bytes, name));
         } catch (IOException | UncheckedIOException e) {
+            throw new Refused(Defect.in(name, "table-unreadable"), e);
+        }
+    }
+
+    private static byte[] bytes(Path file, String name) {
+        try (InputStream input = Files.newInputStream(file)) {
+            byte[] bytes = input.readNBytes(LARGEST + 1);
+            if (bytes.length > LARGEST) {
+                throw new Refused(Defect.in(name, "table-too-large", Integer.toString(LARGEST >> 20)));
+            }
+            return bytes;
+        } catch (IOException e) {
             throw new Refused(Defect.in(name, "table-unreadable"), e);
         }
     }
@@ -101,9 +110,10 @@ public final class Tables {
         return best;
     }
 
-    private static List<Table> workbook(Path file, String name) throws IOException {
+    private static List<Table> workbook(byte[] bytes, String name) {
         List<Table> tables = new ArrayList<>();
-        try (InputStream input = Files.newInputStream(file); ReadableWorkbook workbook = new ReadableWorkbook(input)) {
+        try (InputStream input = new ByteArrayInputStream(bytes);
+                ReadableWorkbook workbook = new ReadableWorkbook(input)) {
             for (Sheet sheet : workbook.getSheets().toList()) {
                 List<Row> rows = new ArrayList<>();
                 try (Stream<org.dhatim.fastexcel.reader.Row> read = sheet.openStream()) {
@@ -111,8 +121,8 @@ public final class Tables {
                 }
                 tables.add(new Table(name + " / " + sheet.getName(), sheet.getName(), filled(rows)));
             }
-        } catch (RuntimeException e) {
-            // The library fails in ways of its own on what is no workbook.
+        } catch (IOException | RuntimeException e) {
+            // The library fails in ways of its own on what is no workbook, or on the half of one.
             throw new Refused(Defect.in(name, "table-no-workbook"), e);
         }
         return tables;

@@ -20,8 +20,7 @@ final class RefusalText {
     /** Why it was refused and whom it is from, in one line. */
     String reason(Received.Turned turned) {
         StringBuilder line = new StringBuilder(wording.sentence(turned.why()));
-        // The question whether to trust a tablet names it already.
-        turned.sender().filter(sender -> !turned.untrusted()).ifPresent(sender -> line.append(' ')
+        turned.unsaid().ifPresent(sender -> line.append(' ')
                 .append(wording.text("office.sender." + sender.code(), sender.told())));
         if (!turned.kept()) {
             line.append(' ').append(wording.text("office.receive.unkept"));

@@ -73,5 +73,11 @@ public sealed interface Received {
         public boolean untrusted() {
             return why.code().equals("device-untrusted");
         }
+
+        /** Whom it is from, where that is still to be said: the question whether to trust a tablet names it already. */
+        public Optional<Sender> unsaid() {
+            // Of what is no pack at all nobody asks which tablet it is from.
+            return sender.filter(one -> !untrusted() && !why.code().equals("pack-not-zip"));
+        }
     }
 }

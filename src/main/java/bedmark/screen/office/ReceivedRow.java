@@ -59,7 +59,7 @@ public final class ReceivedRow extends HBox {
         } else if (received instanceof Received.Turned turned) {
             words.getChildren().add(Texts.wrapped(wording.sentence(turned.why())));
             // The question whether to trust a tablet names it already.
-            turned.sender().filter(sender -> !turned.untrusted()).ifPresent(sender -> words.getChildren()
+            turned.unsaid().ifPresent(sender -> words.getChildren()
                     .add(Texts.wrapped(Wording.plain(wording.text("office.sender." + sender.code(), sender.told())))));
             if (!turned.kept()) {
                 words.getChildren().add(Texts.trouble(wording.text("office.receive.unkept")));

@@ -77,8 +77,12 @@ public final class ReceivedRow extends HBox {
         receipt.ifPresent(this::receipt);
     }
 
+    /** A whole path is longer than a line; the folder's own name says which stick it is. */
     private void receipt(Path file) {
-        Label written = Texts.wrapped(Wording.plain(wording.text("office.receive.receipt", file)));
+        Path folder = file.getParent().getFileName();
+        Label written = Texts.wrapped(Wording.plain(wording.text("office.receive.receipt",
+                folder == null ? file : folder.resolve(file.getFileName()))));
+        written.setAccessibleText(Wording.plain(wording.text("office.receive.receipt", file)));
         written.getStyleClass().add("soft");
         words.getChildren().add(written);
     }

@@ -117,7 +117,8 @@ class OfficeWindowTest {
                 List<Path> receipts = files.filter(file -> file.toString().endsWith(".receipt.json")).toList();
                 assertEquals(3, receipts.size());
                 for (Path receipt : receipts) {
-                    assertTrue(window.words().contains("Receipt: " + receipt), window.words());
+                    assertTrue(window.words().contains("Receipt beside the pack: packs/" + receipt.getFileName()),
+                            window.words());
                     assertTrue(Files.readString(receipt).contains("Ostermere works"));
                 }
             }

@@ -15,6 +15,7 @@ import java.nio.file.Path;
 import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -49,6 +50,9 @@ final class OfficeReceiveCommand implements Callable<Integer> {
             description = "Folder for the receipts (default: beside each pack).")
     private Path receipts;
 
+    @Option(names = "--json", description = "Print JSON lines, one pack each; refusals also go to standard error.")
+    private boolean json;
+
     OfficeReceiveCommand(Surroundings surroundings) {
         this.surroundings = surroundings;
     }
@@ -77,7 +81,8 @@ final class OfficeReceiveCommand implements Callable<Integer> {
         }
         List<Path> files = PackFolder.packs(given);
         if (files.isEmpty()) {
-            say("", "office.receive.no-packs", given);
+            (json ? surroundings.err() : surroundings.out()).println(Wording.plain(surroundings.words()
+                    .text("office.receive.no-packs", given)));
         }
         return files;
     }
@@ -90,6 +95,10 @@ final class OfficeReceiveCommand implements Callable<Integer> {
     private void tell(OfficeStore store, Received received) {
         if (received instanceof Received.Turned turned) {
             surroundings.err().println("bedmark: " + new RefusalText(surroundings.wording()).about(turned));
+        }
+        if (json) {
+            Optional<Path> receipt = received.confirmed().flatMap(one -> written(store, received.file(), one));
+            surroundings.out().println(new ReceivedJson(surroundings.wording()).line(received, receipt));
             return;
         }
         if (received instanceof Received.Taken taken) {
@@ -101,7 +110,9 @@ final class OfficeReceiveCommand implements Callable<Integer> {
         } else if (received instanceof Received.AlreadyHere here) {
             say("", "office.receive.here", here.file(), here.device());
         }
-        received.confirmed().ifPresent(receipt -> confirm(store, received.file(), receipt));
+        received.confirmed().ifPresent(receipt -> written(store, received.file(), receipt).ifPresent(file ->
+                say("  ", "office.receive.receipt-of", file,
+                        OfficeNameCommand.named(surroundings, receipt.office().name()))));
     }
 
     private void tell(Clash clash) {
@@ -112,13 +123,13 @@ final class OfficeReceiveCommand implements Callable<Integer> {
     }
 
     /** A receipt that can't be written loses nothing: the same pack received again writes it again. */
-    private void confirm(OfficeStore store, Path pack, Receipt receipt) {
+    private Optional<Path> written(OfficeStore store, Path pack, Receipt receipt) {
         Path into = receipts == null ? pack.toAbsolutePath().getParent() : receipts;
         try {
-            say("  ", "office.receive.receipt-of", store.write(receipt, into),
-                    OfficeNameCommand.named(surroundings, receipt.office().name()));
+            return Optional.of(store.write(receipt, into));
         } catch (Refused e) {
             surroundings.err().println("bedmark: " + surroundings.wording().sentence(e.defect()));
+            return Optional.empty();
         }
     }
 

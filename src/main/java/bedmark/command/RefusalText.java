@@ -40,7 +40,12 @@ final class RefusalText {
     }
 
     String json(Refusal refusal) {
-        Received.Turned turned = refusal.turned();
+        return new String(JsonWriter.compact(document(refusal.turned()).with("firstAt", Node.time(refusal.first()))
+                .with("lastAt", Node.time(refusal.last()))), StandardCharsets.UTF_8);
+    }
+
+    /** As an object; what is not known is absent. */
+    Branch document(Received.Turned turned) {
         Branch branch = Branch.EMPTY.with("file", turned.file().toString());
         if (turned.content().isPresent()) {
             branch = branch.with("sha256", turned.content().get().sha256())
@@ -49,10 +54,8 @@ final class RefusalText {
         branch = with(branch, "sender", turned.sender().map(sender -> sender.fingerprint().isEmpty() ? "unproved"
                 : sender.trusted() ? "trusted" : "untrusted"));
         branch = with(branch, "tablet", turned.sender().flatMap(sender -> sender.name()));
-        return new String(JsonWriter.compact(with(branch, "fingerprint", turned.fingerprint())
-                .with("firstAt", Node.time(refusal.first())).with("lastAt", Node.time(refusal.last()))
-                .with("code", turned.why().code()).with("reason", wording.sentence(turned.why()))),
-                StandardCharsets.UTF_8);
+        return with(branch, "fingerprint", turned.fingerprint()).with("code", turned.why().code())
+                .with("reason", wording.sentence(turned.why()));
     }
 
     private static Branch with(Branch branch, String key, Optional<String> text) {

@@ -236,7 +236,8 @@ public final class OfficeStore implements AutoCloseable {
                 note.accept(books.tables());
                 return true;
             }));
-        } catch (OfficeBroken e) {
+        } catch (OfficeBroken | IllegalStateException e) {
+            // They may be closed, too, where they could not be made anew.
             return false;
         }
     }

@@ -90,8 +90,19 @@ class OfficeCommandsTest {
         assertEquals(3, text.out().lines().count(), text::out);
         assertTrue(text.out().lines().anyMatch(line -> line.contains(damaged + ": ") && line.contains("Tablet 3")
                 && line.contains("a key that this office does not trust")), text::out);
-        assertEquals(0, office("receive", packs.resolve("a.zip").toString(), packs.resolve("b.zip").toString(),
-                "--trust", Offices.fingerprint(folder.resolve("tablet"))).code());
+        Result in = office("receive", "--json", packs.resolve("a.zip").toString(), packs.resolve("b.zip").toString(),
+                "--trust", Offices.fingerprint(folder.resolve("tablet")));
+        assertEquals(0, in.code(), in::err);
+        assertTrue(in.out().lines().allMatch(line -> line.contains("\"outcome\":\"received\"")), in::out);
+        Result lines = office("receive", "--json", packs.resolve("a.zip").toString(), damaged.toString());
+        assertEquals(3, lines.code());
+        assertEquals(1, lines.err().lines().count(), lines::err);
+        List<Branch> told = lines.out().lines().map(line ->
+                JsonReader.read(line.getBytes(StandardCharsets.UTF_8)).root()).toList();
+        assertEquals(List.of("known", "refused"), told.stream().map(one -> one.text("outcome").orElseThrow()).toList());
+        assertTrue(Files.exists(Path.of(told.get(0).text("receipt").orElseThrow())));
+        assertEquals(Optional.of("Tablet 3"), told.get(1).text("tablet"));
+        assertEquals(Optional.of("trusted"), told.get(1).text("sender"));
         Branch left = JsonReader.read(office("refused", "--json").out().getBytes(StandardCharsets.UTF_8)).root();
         assertEquals(damaged.toString(), left.text("file").orElseThrow());
         assertEquals("trusted", left.text("sender").orElseThrow());

@@ -54,7 +54,7 @@ public final class ReceiveModel {
 
     /** What came of packs, where their receipts are, why the first was not written, and what is still refused. */
     private record Came(List<Received> packs, Map<Received, Path> receipts, Optional<Defect> unwritten,
-                        List<Refusal> refused) {
+                        Optional<List<Refusal>> refused) {
     }
 
     /** A model at a desk; what came before it is told apart from what comes now. */
@@ -95,6 +95,15 @@ public final class ReceiveModel {
 
     private List<Refusal> refusals() {
         return new Refusals(desk.store(), desk.clock()).open();
+    }
+
+    /** What came is told even where the list of the refused can't be read. */
+    private Optional<List<Refusal>> stillRefused() {
+        try {
+            return Optional.of(refusals());
+        } catch (Refused e) {
+            return Optional.empty();
+        }
     }
 
     private static List<Earlier> earlier(List<Entry> packs) {
@@ -178,13 +187,13 @@ public final class ReceiveModel {
                 unwritten.add(e.defect());
             }
         }));
-        return new Came(packs, written, unwritten.stream().findFirst(), refusals());
+        return new Came(packs, written, unwritten.stream().findFirst(), stillRefused());
     }
 
     private void show(Came came) {
         receipts.putAll(came.receipts());
         came.packs().forEach(one -> received.add(0, one));
-        refused.set(came.refused());
+        came.refused().ifPresent(refused::set);
         came.unwritten().ifPresent(desk::tell);
     }
 

@@ -44,6 +44,14 @@ public final class Refusals {
                 .map(row -> read(row, store.minutes(tables)::trusts)).toList());
     }
 
+    /** Nobody waits for it any more; refused once more, it is here again. */
+    public void putAway(Refusal refusal) {
+        store.ask(tables -> {
+            tables.refusals().settle(List.of(key(refusal.turned())));
+            return true;
+        });
+    }
+
     /** Notes what was refused; one that can't be noted is told as it came, with that. */
     List<Received> noted(List<Received> received) {
         List<Received.Turned> turned = received.stream().flatMap(Refusals::refused).toList();
@@ -60,7 +68,8 @@ public final class Refusals {
     private static Stream<Received.Turned> refused(Received one) {
         return Stream.of(one).filter(Received.Turned.class::isInstance).map(Received.Turned.class::cast)
                 .filter(turned -> turned.content().isPresent() || Files.exists(turned.file()))
-                .filter(turned -> Stream.of("store-", "not-saved-", "office-").noneMatch(turned.why().code()::startsWith));
+                .filter(turned -> Stream.of("store-", "not-saved-", "office-")
+                        .noneMatch(turned.why().code()::startsWith));
     }
 
     private void note(OfficeTables tables, List<Received.Turned> turned, List<String> in) {
@@ -77,10 +86,13 @@ public final class Refusals {
 
     private static RefusalRow row(Received.Turned turned, long now) {
         Optional<Received.Content> content = turned.content();
-        return new RefusalRow(content.map(Received.Content::sha256).orElseGet(() -> unread(turned.file())),
-                whole(turned.file()), content.map(Received.Content::sha256),
+        return new RefusalRow(key(turned), whole(turned.file()), content.map(Received.Content::sha256),
                 content.map(one -> OptionalLong.of(one.bytes())).orElse(OptionalLong.empty()),
                 turned.sender().flatMap(Sender::name), turned.fingerprint(), text(turned.why()), now, now);
+    }
+
+    private static String key(Received.Turned turned) {
+        return turned.content().map(Received.Content::sha256).orElseGet(() -> unread(turned.file()));
     }
 
     /** What a file is told apart by that could not be read to its end; no digest looks so. */

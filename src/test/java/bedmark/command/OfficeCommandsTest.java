@@ -111,6 +111,10 @@ class OfficeCommandsTest {
         for (String key : List.of("sha256", "fingerprint", "code", "reason", "firstAt", "lastAt")) {
             assertTrue(left.text(key).isPresent(), key);
         }
+        assertEquals(2, office("refused", "--put-away", "never.zip").code());
+        assertEquals("No refused pack waits.", office("refused", "--put-away", damaged.toString()).out().strip());
+        assertEquals(3, office("receive", damaged.toString()).code());
+        assertEquals("", office("refused", "--json", "--put-away", left.text("sha256").orElseThrow()).out());
     }
 
     @Test

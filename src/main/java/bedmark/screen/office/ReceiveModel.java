@@ -93,6 +93,14 @@ public final class ReceiveModel {
         desk.ask(progress -> refusals(), refused::set);
     }
 
+    /** Nobody waits for a pack any more. */
+    public void putAway(Refusal refusal) {
+        desk.ask(progress -> {
+            new Refusals(desk.store(), desk.clock()).putAway(refusal);
+            return refusals();
+        }, refused::set);
+    }
+
     private List<Refusal> refusals() {
         return new Refusals(desk.store(), desk.clock()).open();
     }

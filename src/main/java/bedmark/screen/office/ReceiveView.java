@@ -124,7 +124,7 @@ final class ReceiveView extends VBox {
                 .filter(one -> !told.contains(one.turned().content())).toList();
         List<Node> shown = new ArrayList<>();
         refusals.stream().limit(REFUSED_SHOWN).forEach(one ->
-                shown.add(new ReceivedRow(wording, one, model::trust)));
+                shown.add(new ReceivedRow(wording, one, model::trust, () -> model.putAway(one))));
         if (refusals.size() > REFUSED_SHOWN) {
             Label more = Texts.wrapped(wording.text("office.receive.more-refused", refusals.size() - REFUSED_SHOWN));
             more.getStyleClass().add("soft");

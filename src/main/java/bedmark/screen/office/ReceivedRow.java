@@ -13,6 +13,7 @@ import java.util.Optional;
 import java.util.function.Consumer;
 import javafx.geometry.Pos;
 import javafx.scene.control.Label;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
@@ -21,16 +22,31 @@ import javafx.scene.layout.VBox;
 public final class ReceivedRow extends HBox {
     private final Wording wording;
     private final VBox words = new VBox();
+    private final FlowPane under = new FlowPane();
 
-    /** A pack that was refused before, with the time. */
-    ReceivedRow(Wording wording, Refusal refusal, Consumer<Received.Turned> trust) {
+    /**
+     * A pack that was refused before, with the time.
+     *
+     * @param putAway told that nobody waits for it any more
+     */
+    ReceivedRow(Wording wording, Refusal refusal, Consumer<Received.Turned> trust, Runnable putAway) {
         this(wording, refusal.turned(), Optional.empty(), trust);
         Label when = Texts.wrapped(Wording.plain(refusal.first().equals(refusal.last())
                 ? wording.text("office.receive.turned", wording.moment(refusal.last()), folder(refusal))
                 : wording.text("office.receive.turned-again", wording.moment(refusal.last()), folder(refusal),
                         wording.moment(refusal.first()))));
         when.getStyleClass().add("soft");
+        ActionButton away = new ActionButton(Weight.PLAIN, wording.text("office.receive.put-away"), putAway);
+        away.setId("put-away");
+        away.setAccessibleText(away.getText() + ": " + refusal.turned().file().getFileName());
+        words.getChildren().remove(under);
         words.getChildren().add(when);
+        if (refusal.turned().untrusted()) {
+            under.getChildren().add(away);
+            words.getChildren().add(under);
+        } else {
+            getChildren().add(away);
+        }
     }
 
     private static String folder(Refusal refusal) {
@@ -45,6 +61,7 @@ public final class ReceivedRow extends HBox {
                        Consumer<Received.Turned> trust) {
         this.wording = wording;
         getStyleClass().add("received-row");
+        under.getStyleClass().add("under");
         setAlignment(Pos.CENTER_LEFT);
         words.setMinWidth(0);
         HBox.setHgrow(words, Priority.ALWAYS);
@@ -69,8 +86,7 @@ public final class ReceivedRow extends HBox {
                         trust.accept(turned));
                 button.setId("trust");
                 // Beside the words it would leave the fingerprint too little room to be compared.
-                HBox under = new HBox(button);
-                under.getStyleClass().add("under");
+                under.getChildren().add(button);
                 words.getChildren().add(under);
             }
         }

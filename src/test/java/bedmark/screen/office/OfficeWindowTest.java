@@ -180,6 +180,8 @@ class OfficeWindowTest {
             assertFalse(window.words().contains("aún no confía"), window.words());
             assertTrue(window.words().contains("cut.zip"), window.words());
             assertTrue(window.words().contains("Recibir (1)"), window.words());
+            window.click("put-away");
+            assertFalse(window.words().contains("cut.zip") || window.words().contains("Recibir ("), window.words());
         }
     }
 

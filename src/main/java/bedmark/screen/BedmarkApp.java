@@ -30,8 +30,6 @@ import javafx.stage.Stage;
 
 /** The window of the tablet app. */
 public final class BedmarkApp extends Application {
-    private static final double WIDTH = 1280;
-    private static final double HEIGHT = 800;
     /** By then a person has begun to walk, and the start is not held up. */
     private static final Duration PROOF_DELAY = Duration.ofSeconds(20);
 
@@ -98,7 +96,7 @@ public final class BedmarkApp extends Application {
             Light light = preferences.lighting().at(LocalTime.now(clock));
             Density density = Shell.density(preferences);
             Theme.writeOut(light, density);
-            untilLaunched(() -> ready = Optional.of(FirstScene.dressed(light, density, WIDTH, HEIGHT)));
+            untilLaunched(() -> ready = Optional.of(FirstScene.dressed(light, density, Windows.WIDTH, Windows.HEIGHT)));
             FirstScene.PARTS.forEach(part -> untilLaunched(() -> ready.ifPresent(first -> first.tryOn(part.get()))));
         }, "prepare-toolkit");
         thread.setDaemon(true);
@@ -149,19 +147,13 @@ public final class BedmarkApp extends Application {
 
     private static boolean launch(Launch begin) {
         launch = Optional.of(begin);
-        ToolkitNotes.hush();
-        try {
-            Application.launch(BedmarkApp.class);
-            return true;
-        } catch (UnsupportedOperationException e) {
-            return false;
-        }
+        return Windows.launch(BedmarkApp.class);
     }
 
     @Override
     public void start(Stage stage) {
         Launch given = launch.orElseThrow();
-        stage.setTitle("Bedmark");
+        stage.setTitle(Windows.TITLE);
         given.begun().ifPresentOrElse(begun -> work(stage, given, begun), () -> ask(stage, given));
         stage.show();
     }
@@ -178,7 +170,7 @@ public final class BedmarkApp extends Application {
     /** Shows a page that stands without a store as the person likes the screen. */
     static void show(Stage stage, LonePage page, Preferences preferences, Clock clock) {
         ToolkitLanguage.set(preferences.locale());
-        Scene scene = new Scene(page, WIDTH, HEIGHT);
+        Scene scene = new Scene(page, Windows.WIDTH, Windows.HEIGHT);
         Theme.apply(scene, preferences.lighting().at(LocalTime.now(clock)), Shell.density(preferences));
         stage.setScene(scene);
         page.focus();
@@ -188,7 +180,7 @@ public final class BedmarkApp extends Application {
         Workplace here = begun.workplace();
         begun.choice().over(stage);
         here.proveAfter(PROOF_DELAY);
-        Shell opened = new Shell(here, ready.orElseGet(() -> FirstScene.plain(WIDTH, HEIGHT)), begun.walked());
+        Shell opened = new Shell(here, ready.orElseGet(() -> FirstScene.plain(Windows.WIDTH, Windows.HEIGHT)), begun.walked());
         workplace = Optional.of(here);
         shell = Optional.of(opened);
         Diary noted = new Diary(given.folder(), given.clock());

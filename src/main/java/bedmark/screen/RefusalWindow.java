@@ -43,7 +43,7 @@ public final class RefusalWindow {
         Stage stage = new Stage();
         RefusedView view = new RefusedView(new Wording(new Words(preferences.locale()), preferences.units()), why,
                 stage::close);
-        stage.setTitle("Bedmark");
+        stage.setTitle(Windows.TITLE);
         BedmarkApp.show(stage, view, preferences, clock);
         stage.show();
         return stage;

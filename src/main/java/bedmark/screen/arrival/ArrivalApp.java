@@ -2,7 +2,7 @@ package bedmark.screen.arrival;
 
 import bedmark.pack.FileKind;
 import bedmark.screen.StageChoice;
-import bedmark.screen.ToolkitNotes;
+import bedmark.screen.Windows;
 import bedmark.screen.office.OfficeApp;
 import bedmark.screen.office.OfficeShell;
 import java.nio.file.Path;
@@ -14,8 +14,6 @@ import javafx.stage.Stage;
 
 /** The window that opens when a person opens a pack, a round file or a receipt. */
 public final class ArrivalApp extends Application {
-    private static final double WIDTH = 1280;
-    private static final double HEIGHT = 800;
 
     /** What the launcher hands over; the toolkit makes the application itself and takes no arguments but texts. */
     private static Optional<Launch> launch = Optional.empty();
@@ -35,13 +33,7 @@ public final class ArrivalApp extends Application {
      */
     public static boolean open(Path file, FileKind kind, Path home, Clock clock) {
         launch = Optional.of(new Launch(file, kind, home, clock));
-        ToolkitNotes.hush();
-        try {
-            Application.launch(ArrivalApp.class);
-            return true;
-        } catch (UnsupportedOperationException e) {
-            return false;
-        }
+        return Windows.launch(ArrivalApp.class);
     }
 
     @Override
@@ -49,8 +41,8 @@ public final class ArrivalApp extends Application {
         Launch given = launch.orElseThrow();
         model = new ArrivalModel(given.file(), given.kind(), given.home(), given.clock(), Platform::runLater,
                 new StageChoice(stage));
-        shell = new ArrivalShell(model, WIDTH, HEIGHT, stage::close, () -> toOffice(stage));
-        stage.setTitle("Bedmark – " + given.file().getFileName());
+        shell = new ArrivalShell(model, Windows.WIDTH, Windows.HEIGHT, stage::close, () -> toOffice(stage));
+        stage.setTitle(Windows.TITLE + " – " + given.file().getFileName());
         stage.setScene(shell.scene());
         stage.show();
     }
@@ -58,7 +50,7 @@ public final class ArrivalApp extends Application {
     private void toOffice(Stage stage) {
         model.handOver().ifPresent(desk -> {
             office = Optional.of(OfficeApp.show(stage, desk));
-            stage.setTitle("Bedmark");
+            stage.setTitle(Windows.TITLE);
         });
     }
 

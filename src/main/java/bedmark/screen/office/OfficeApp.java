@@ -2,7 +2,7 @@ package bedmark.screen.office;
 
 import bedmark.office.OfficeStore;
 import bedmark.screen.StageChoice;
-import bedmark.screen.ToolkitNotes;
+import bedmark.screen.Windows;
 import java.time.Clock;
 import java.util.Optional;
 import javafx.application.Application;
@@ -11,8 +11,6 @@ import javafx.stage.Stage;
 
 /** The window of the office. */
 public final class OfficeApp extends Application {
-    private static final double WIDTH = 1280;
-    private static final double HEIGHT = 800;
 
     /** What the launcher hands over; the toolkit makes the application itself and takes no arguments but texts. */
     private static Optional<Launch> launch = Optional.empty();
@@ -29,21 +27,18 @@ public final class OfficeApp extends Application {
      */
     public static boolean open(OfficeStore store, Clock clock) {
         launch = Optional.of(new Launch(store, clock));
-        ToolkitNotes.hush();
-        try {
-            Application.launch(OfficeApp.class);
-            return true;
-        } catch (UnsupportedOperationException e) {
+        boolean opened = Windows.launch(OfficeApp.class);
+        if (!opened) {
             store.close();
-            return false;
         }
+        return opened;
     }
 
     @Override
     public void start(Stage stage) {
         Launch given = launch.orElseThrow();
         shell = show(stage, new OfficeDesk(given.store(), given.clock(), Platform::runLater, new StageChoice(stage)));
-        stage.setTitle("Bedmark");
+        stage.setTitle(Windows.TITLE);
         stage.show();
     }
 
@@ -57,8 +52,8 @@ public final class OfficeApp extends Application {
         Thread.setDefaultUncaughtExceptionHandler((thread, failure) -> desk.failed(failure));
         Thread.currentThread().setUncaughtExceptionHandler((thread, failure) -> desk.failed(failure));
         boolean sized = stage.getScene() != null;
-        OfficeShell shell = new OfficeShell(desk, sized ? stage.getScene().getWidth() : WIDTH,
-                sized ? stage.getScene().getHeight() : HEIGHT);
+        OfficeShell shell = new OfficeShell(desk, sized ? stage.getScene().getWidth() : Windows.WIDTH,
+                sized ? stage.getScene().getHeight() : Windows.HEIGHT);
         stage.setScene(shell.scene());
         return shell;
     }

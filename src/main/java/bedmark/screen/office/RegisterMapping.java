@@ -38,7 +38,8 @@ final class RegisterMapping extends VBox {
         for (String source : model.sources()) {
             List<Mapped> columns = draft.mapping().stream().filter(one -> one.source().equals(source)).toList();
             Optional<String> list = columns.stream().map(Mapped::list).findFirst();
-            HBox table = new HBox(new Label(source), choices("table " + source, source, lists(), list.orElse(""),
+            HBox table = new HBox(new Label(source), choices("table " + source, source, lists(),
+                    undecided(draft, source) ? Optional.empty() : Optional.of(list.orElse("")),
                     chosen -> model.holds(source, chosen)));
             table.getStyleClass().add("table");
             FlowPane row = new FlowPane();
@@ -46,6 +47,11 @@ final class RegisterMapping extends VBox {
             columns.forEach(column -> row.getChildren().add(card(column)));
             getChildren().addAll(table, row);
         }
+    }
+
+    private static boolean undecided(Draft draft, String source) {
+        return draft.defects().stream().anyMatch(defect -> defect.code().equals("table-unknown")
+                && defect.where().equals(source));
     }
 
     private List<Choice> lists() {
@@ -64,25 +70,28 @@ final class RegisterMapping extends VBox {
         Meanings.keys(column.list()).forEach(key -> keys.add(new Choice(key, RegisterWords.column(wording, key))));
         Label head = Texts.wrapped(column.head());
         head.getStyleClass().add("soft");
-        VBox card = new VBox(head, choices("column " + place, place, keys, column.key(), chosen ->
+        VBox card = new VBox(head, choices("column " + place, place, keys, Optional.of(column.key()), chosen ->
                 model.means(column.source(), column.head(), chosen, Optional.empty())));
         List<Unit> units = Meanings.units(column.list(), column.key());
         if (!units.isEmpty()) {
             List<Choice> codes = new ArrayList<>(List.of(new Choice("", wording.text("office.register.unit-none"))));
             units.forEach(unit -> codes.add(new Choice(unit.code(), wording.symbol(unit))));
-            card.getChildren().add(choices("unit " + place, place, codes, column.unit(), chosen ->
+            card.getChildren().add(choices("unit " + place, place, codes, Optional.of(column.unit()), chosen ->
                     model.means(column.source(), column.head(), column.key(), Unit.ofCode(chosen))));
         }
         return card;
     }
 
-    private static ComboBox<Choice> choices(String id, String place, List<Choice> choices, String now,
-                                            Consumer<String> choose) {
+    /** @param now what is chosen already: that could not be chosen once more, and nothing is shown as if it were */
+    private ComboBox<Choice> choices(String id, String place, List<Choice> choices, Optional<String> now,
+                                     Consumer<String> choose) {
         ComboBox<Choice> box = new ComboBox<>();
         box.setId(id.replaceAll("[^\\p{L}\\p{N}]+", "-"));
         box.setAccessibleText(place);
         box.getItems().setAll(choices);
-        box.setValue(choices.stream().filter(one -> one.code().equals(now)).findFirst().orElse(choices.get(0)));
+        box.setPromptText(wording.text("office.register.list-choose"));
+        now.ifPresent(code -> box.setValue(choices.stream().filter(one -> one.code().equals(code)).findFirst()
+                .orElse(choices.get(0))));
         box.valueProperty().addListener((property, before, chosen) -> choose.accept(chosen.code()));
         return box;
     }

@@ -57,6 +57,7 @@ public final class RegisterModel {
         this.importing = new ImportModel(desk, plant);
         plant.addListener((property, before, now) -> lookElsewhere());
         list.addListener((property, before, now) -> lookElsewhere());
+        importing.draftProperty().addListener((property, before, now) -> workOn());
         desk.changesProperty().addListener((property, before, now) -> refresh());
         refresh();
     }
@@ -74,8 +75,14 @@ public final class RegisterModel {
     }
 
     private void lookElsewhere() {
-        stays.set(Optional.empty());
+        workOn();
         look();
+    }
+
+    /** What was told of the work before has been seen. */
+    private void workOn() {
+        stays.set(Optional.empty());
+        written.set(Optional.empty());
     }
 
     private void look() {
@@ -152,7 +159,7 @@ public final class RegisterModel {
         return importing;
     }
 
-    /** Where something was written last. */
+    /** Where something was written, until something else is done. */
     public ReadOnlyObjectProperty<Optional<Path>> writtenProperty() {
         return written.getReadOnlyProperty();
     }
@@ -183,7 +190,7 @@ public final class RegisterModel {
      */
     public void edit(Optional<List<String>> row, String key, String text) {
         RegisterEdits.Cell cell = cell(row, key);
-        stays.set(Optional.empty());
+        workOn();
         edits.typed(cell, text.strip());
         show();
         if (row.isPresent()) {
@@ -235,6 +242,7 @@ public final class RegisterModel {
 
     /** Begins a new row. */
     public void begin() {
+        workOn();
         begun.add(List.of(plant.get().orElse(""), list.get()));
         show();
     }
@@ -259,7 +267,7 @@ public final class RegisterModel {
     /** Takes a row away; one that is still named stays, and what names it is said. */
     public void remove(List<String> row) {
         RegisterEdits.Cell removed = cell(Optional.of(row), "");
-        stays.set(Optional.empty());
+        workOn();
         change(removed.plant(), RegisterChange.removal(removed.list(), row), defects -> {
             if (defects.isEmpty()) {
                 edits.forgetRow(removed);

@@ -456,6 +456,24 @@ class OfficeWindowTest {
         }
     }
 
+    @Test
+    void aTableThatNobodyKnowsCanBeLeftOutAtOnceAndWhatWasWrittenIsToldOnlyUntilThen() throws Exception {
+        Path out = Files.createDirectories(folder.resolve("out"));
+        try (OfficeWindow window = window(1280, 800)) {
+            receiveAll(window);
+            window.click("room-register");
+            window.chooses(out);
+            window.click("send-round");
+            assertTrue(window.words().contains("Written to"), window.words());
+            Files.writeString(out.resolve("spares.csv"), "part,shelf\nbelt clamp,7\n");
+            window.click("import");
+            window.until(() -> window.words().contains("none of a register's lists"));
+            assertFalse(window.words().contains("Written to"), window.words());
+            choose(window, "table-spares-csv", "not taken in");
+            window.until(() -> window.words().contains("Would be taken in: 0 new"));
+        }
+    }
+
     private static void choose(OfficeWindow window, String id, String text) throws Exception {
         ComboBox<?> box = (ComboBox<?>) window.node(id);
         Glass.on(() -> {

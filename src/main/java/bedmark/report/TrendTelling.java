@@ -2,6 +2,7 @@ package bedmark.report;
 
 import bedmark.engine.verdict.Level;
 import bedmark.office.JudgedZone;
+import bedmark.office.trend.Change;
 import bedmark.office.trend.Measure;
 import bedmark.office.trend.Observation;
 import bedmark.office.trend.Outlook;
@@ -71,9 +72,37 @@ public final class TrendTelling {
         say(lines, "", "office.interval." + trend.interval().reason().code(), trend.interval().days(),
                 wording.format().computed(trend.interval().pfDays().orElse(0), 0));
         if (own.isPresent()) {
-            say(lines, "", "office.trend.judged", level(own), level(today));
+            lines.add(judged(own, today));
         }
         return lines;
+    }
+
+    /** How the latest result is judged by the register that it was made with, and by today's. */
+    public String judged(Optional<JudgedZone> own, Optional<JudgedZone> today) {
+        return level(own).equals(level(today)) ? wording.text("office.trend.judged-alike", level(own))
+                : wording.text("office.trend.judged", level(own), level(today));
+    }
+
+    /** What a drawing of one measure over time shows, line by line. */
+    public String drawn(Series series, List<Change> changes) {
+        List<String> told = new ArrayList<>();
+        say(told, "", "office.trend." + series.measure().code());
+        series.overloaded().ifPresent(limit -> say(told, "", "office.trend.drawn-over",
+                value(series.measure(), limit)));
+        series.near().ifPresent(limit -> say(told, "", "office.trend.drawn-near", value(series.measure(), limit)));
+        if (series.observations().stream().anyMatch(one -> one.standardUncertainty() > 0)) {
+            say(told, "", "office.trend.drawn-bar");
+        }
+        if (series.observations().stream().anyMatch(Observation::replaced)) {
+            say(told, "", "office.trend.drawn-replaced");
+        }
+        if (!(series.outlook() instanceof Outlook.TooFew)) {
+            say(told, "", "office.trend.drawn-fit");
+        }
+        if (!changes.isEmpty()) {
+            say(told, "", "office.trend.drawn-change");
+        }
+        return String.join(" · ", told);
     }
 
     private String level(Optional<JudgedZone> judged) {

@@ -77,9 +77,9 @@ final class EnergyView extends VBox {
     }
 
     private Node row(Bar bar, double most) {
-        Label name = new Label(bar.name());
+        Label name = Texts.wrapped(bar.name());
         name.getStyleClass().add("zone-name");
-        Label area = new Label(bar.area().equals(bar.name()) ? bar.plant() : bar.area());
+        Label area = Texts.wrapped(bar.area().equals(bar.name()) ? bar.plant() : bar.area());
         area.getStyleClass().add("soft");
         VBox names = new VBox(name, area);
         names.getStyleClass().add("bar-names");

@@ -1,9 +1,7 @@
 package bedmark.screen.office;
 
-import bedmark.engine.verdict.Level;
 import bedmark.office.Answered;
 import bedmark.office.FindingLine;
-import bedmark.office.JudgedZone;
 import bedmark.office.trend.Measure;
 import bedmark.office.trend.Series;
 import bedmark.report.TrendTelling;
@@ -94,9 +92,10 @@ final class ZoneStoryView extends ScrollPane {
         name.getStyleClass().add("story-name");
         Label place = new Label(wording.text("office.place." + story.ranked().place().code()));
         place.getStyleClass().add("zone-name");
-        Label levels = Texts.wrapped(wording.text("office.trend.judged", level(story.own()), level(story.today())));
-        levels.getStyleClass().add("soft");
-        VBox words = new VBox(name, place, levels);
+        VBox words = new VBox(name, place);
+        if (story.own().isPresent()) {
+            words.getChildren().add(soft(telling.judged(story.own(), story.today())));
+        }
         words.setMinWidth(0);
         HBox.setHgrow(words, Priority.ALWAYS);
         HBox head = new HBox(new LevelGlyph(ZoneCell.shape(story.ranked().place())), words, list);
@@ -105,9 +104,10 @@ final class ZoneStoryView extends ScrollPane {
         return head;
     }
 
-    private String level(Optional<JudgedZone> judged) {
-        return judged.map(one -> one.assessment().level()).map(Level::code)
-                .map(code -> wording.text("verdict.level." + code)).orElse("–");
+    private static Label soft(String text) {
+        Label label = Texts.wrapped(text);
+        label.getStyleClass().add("soft");
+        return label;
     }
 
     private Node chart(Story story) {
@@ -127,15 +127,12 @@ final class ZoneStoryView extends ScrollPane {
             measures.getChildren().add(button);
         }
         shown.ifPresentOrElse(series -> {
-            box.getChildren().add(new TrendChart(series, story.trend().changes(), value ->
-                    telling.value(series.measure(), value)));
+            box.getChildren().addAll(new TrendChart(series, story.trend().changes(), value ->
+                    telling.value(series.measure(), value)), soft(telling.drawn(series, story.trend().changes())));
             telling.outlook(series).forEach(line -> box.getChildren().add(Texts.wrapped(line)));
         }, () -> box.getChildren().add(Texts.wrapped(wording.text("office.worst.never"))));
-        telling.around(story.trend(), Optional.empty(), Optional.empty()).forEach(line -> {
-            Label label = Texts.wrapped(line);
-            label.getStyleClass().add("soft");
-            box.getChildren().add(label);
-        });
+        telling.around(story.trend(), Optional.empty(), Optional.empty()).forEach(line ->
+                box.getChildren().add(soft(line)));
         return box;
     }
 

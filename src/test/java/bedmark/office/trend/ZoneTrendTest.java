@@ -133,12 +133,15 @@ class ZoneTrendTest {
                 outlook.branch("nearReached").orElseThrow());
         assertEquals(Plants.read("{'expectedIs':'beyond-ten-years','earliest':'2027-05-06',"
                 + "'latestIs':'beyond-ten-years'}"), outlook.branch("overloadedReached").orElseThrow());
-        String told = String.join("\n", new TrendTelling(new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC))
-                .lines(trend, Optional.empty(), Optional.empty()));
+        TrendTelling telling = new TrendTelling(new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC));
+        String told = String.join("\n", telling.lines(trend, Optional.empty(), Optional.empty()));
         assertTrue(told.contains("near limit: 220") && told.contains("limit of overload: 250"), told);
         assertTrue(told.contains("about 2027-01-02, at the earliest 2026-01-02, at the latest never."), told);
         assertTrue(told.contains("Overloaded most likely beyond ten years, at the earliest 2027-05-06, at the latest "
                 + "beyond ten years."), told);
+        assertEquals("Depth at the board (root mean square) · full line: limit of overload, "
+                + telling.value(Measure.DEPTH, 0.25) + " · dashed line: near limit, "
+                + telling.value(Measure.DEPTH, 0.22) + " · sloping line: the trend", telling.drawn(series, List.of()));
     }
 
     private static List<TimedValue> rise() {

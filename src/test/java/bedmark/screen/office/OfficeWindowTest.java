@@ -239,6 +239,8 @@ class OfficeWindowTest {
                 return null;
             });
             window.until(() -> window.words().contains("Too few surveys to say"));
+            assertTrue(window.words().contains("full line: limit of overload"), window.words());
+            assertTrue(window.words().contains("Latest survey: Overloaded, both by the register"), window.words());
             String rule = worst.findings().get(0).rule().code();
             window.click("accept-" + rule);
             assertTrue(window.words().contains("needs a reason"), window.words());

@@ -59,6 +59,7 @@ public final class RegisterModel {
         list.addListener((property, before, now) -> lookElsewhere());
         importing.draftProperty().addListener((property, before, now) -> workOn());
         desk.changesProperty().addListener((property, before, now) -> refresh());
+        desk.preferencesProperty().addListener((property, before, now) -> grid.get().ifPresent(shown -> show()));
         refresh();
     }
 
@@ -123,8 +124,10 @@ public final class RegisterModel {
         List<Shown> cells = new ArrayList<>();
         for (int i = 0; i < shown.keys().size(); i++) {
             String held = row.isPresent() ? shown.rows().get(index).get(i) : "";
-            Optional<String> typed = edits.text(cell(row, shown.keys().get(i)));
-            cells.add(new Shown(typed.orElse(held), typed.isPresent()));
+            String key = shown.keys().get(i);
+            Optional<String> typed = edits.text(cell(row, key));
+            cells.add(new Shown(RegisterUnits.shown(desk.wording(), shown.list(), key, typed.orElse(held)),
+                    typed.isPresent()));
         }
         return cells;
     }
@@ -191,7 +194,7 @@ public final class RegisterModel {
     public void edit(Optional<List<String>> row, String key, String text) {
         RegisterEdits.Cell cell = cell(row, key);
         workOn();
-        edits.typed(cell, text.strip());
+        edits.typed(cell, RegisterUnits.typed(cell.list(), key, text.strip()));
         show();
         if (row.isPresent()) {
             tryRow(cell);

@@ -503,7 +503,11 @@ class OfficeWindowTest {
             window.click("language");
             window.click("room-register");
             window.until(() -> window.words().contains("TP-01, ") && window.words().contains("wide"));
+            window.click("list-materials");
+            window.until(() -> window.words().contains(" lb/pie³"));
             window.click("language");
+            window.until(() -> window.words().contains(" lb/ft³"));
+            window.click("list-transfers");
             edit(window, 0, "skirtSpacing", "866 mm", KeyCode.ENTER);
             window.until(() -> spacing(window).equals("866"));
             assertFalse(window.words().contains("wide"), window.words());

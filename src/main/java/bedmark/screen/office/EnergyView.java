@@ -97,7 +97,7 @@ final class EnergyView extends VBox {
             words.add(wording.text(bar.shaft() ? "office.energy.shaft" : "office.energy.electrical", mwh(bar.wh())));
         }
         if (bar.cost().isPresent()) {
-            words.add(wording.format().computed(bar.cost().getAsDouble(), 0) + " " + bar.currency().orElse(""));
+            words.add(wording.format().computed(bar.cost().getAsDouble(), 0) + "\u00A0" + bar.currency().orElse(""));
         }
         if (bar.co2().isPresent()) {
             words.add(wording.text("office.energy.co2", wording.format().computed(bar.co2().getAsDouble() / 1000, 1)));

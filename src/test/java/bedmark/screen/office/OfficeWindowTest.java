@@ -198,9 +198,9 @@ class OfficeWindowTest {
             assertEquals(1, window.desk().store().packs().size());
             window.click("room-energy");
             window.until(() -> window.words().contains("; most at "));
-            assertTrue(window.words().matches("(?s).*remedies save [^;]* MWh \\([^;]* EUR\\); most at TP-[0-9]+: "
-                    + "(free the bed|set the boards wider|lower the feed|renew the worn seals), .* MWh .*"),
-                    window.words());
+            assertTrue(window.words().matches("(?s).*remedies save [^;]*\u00A0MWh \\([^;]*\u00A0EUR\\); most "
+                    + "at TP-[0-9]+: (free the bed|set the boards wider|lower the feed|renew the worn seals), "
+                    + ".*\u00A0MWh .*"), window.words());
             String before = window.words();
             Files.copy(packs.resolve("round-under-way.zip"), inbox.resolve("b.zip"));
             window.until(() -> !window.words().equals(before));

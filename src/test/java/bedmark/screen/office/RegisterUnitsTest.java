@@ -38,7 +38,8 @@ class RegisterUnitsTest {
     @CsvSource({"38°, 38 deg", "85 lb/pie³, 85 [lb_av]/[cft_i]", "85 lb/ft³, 85 [lb_av]/[cft_i]", "much, much",
             "12 furlong, 12 furlong", "12, 12"})
     void whatIsTypedIsReadAsItIsWrittenOrStays(String typed, String read) {
-        assertEquals(read, RegisterUnits.typed("materials", typed.contains("°") ? "surchargeAngle" : "bulkDensity", typed));
+        String key = typed.contains("°") ? "surchargeAngle" : "bulkDensity";
+        assertEquals(read, RegisterUnits.typed("materials", key, typed));
     }
 
     @Test

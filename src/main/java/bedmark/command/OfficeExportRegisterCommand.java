@@ -1,15 +1,10 @@
 package bedmark.command;
 
-import bedmark.document.Defect;
-import bedmark.document.Refused;
 import bedmark.office.OfficeStore;
 import bedmark.office.register.RegisterDesk;
-import bedmark.office.register.RegisterTables;
-import java.io.IOException;
-import java.nio.file.Files;
+import bedmark.office.register.RegisterFolder;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -40,16 +35,10 @@ final class OfficeExportRegisterCommand implements Callable<Integer> {
     public Integer call() {
         try (ProgressLine progress = new ProgressLine(surroundings); OfficeStore store = desk.open(surroundings,
                 progress)) {
-            Map<String, String> files = RegisterTables.of(new RegisterDesk(store).head(plant, List.of()));
-            Files.createDirectories(out);
-            for (Map.Entry<String, String> file : files.entrySet()) {
-                Files.writeString(out.resolve(file.getKey()), file.getValue());
-            }
+            int tables = RegisterFolder.write(new RegisterDesk(store).head(plant, List.of()), out);
             progress.done();
-            surroundings.say("office.register.written", out, files.size());
+            surroundings.say("office.register.written", out, tables);
             return ExitCode.FINE;
-        } catch (IOException e) {
-            throw new Refused(Defect.in(out.toString(), "export-not-saved", String.valueOf(e.getMessage())), e);
         }
     }
 }

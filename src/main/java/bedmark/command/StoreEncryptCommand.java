@@ -46,6 +46,8 @@ final class StoreEncryptCommand implements Callable<Integer> {
         InputFile.requireNoOffice(folder, "encrypt");
         StoreOptions options = StoreOptions.of("tablet").withClock(surroundings.clock())
                 .withLevels(new LevelWord()::of);
+        String done = change ? "store.passphrase.changed"
+                : new StoreFolder(folder, options).holdsStore() ? "store.encrypted" : "store.encrypted-new";
         if (change) {
             Passphrase until = old.map(PassphraseOption::read).or(() -> ask("store.passphrase").map(Passphrase::of))
                     .orElseThrow(StoreEncryptCommand::missing);
@@ -56,8 +58,7 @@ final class StoreEncryptCommand implements Callable<Integer> {
                 new StoreFolder(folder, options.withProgress(progress::at)).seal(passphrase);
             }
         }
-        surroundings.say(change ? "store.passphrase.changed" : "store.encrypted",
-                folder);
+        surroundings.say(done, folder);
         surroundings.say("store.unlock.lost");
         return ExitCode.FINE;
     }

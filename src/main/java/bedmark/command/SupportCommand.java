@@ -7,6 +7,7 @@ import bedmark.index.Store;
 import bedmark.index.StoreCheck;
 import bedmark.journal.FileLayer;
 import bedmark.journal.NamedPath;
+import bedmark.pack.SafeFile;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -45,6 +46,7 @@ final class SupportCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         NamedPath.requireFolder(folder);
         InputFile.requireNoOffice(folder, "support");
+        NamedPath.requireTarget(out);
         List<String> lines = new ArrayList<>();
         lines.add("bedmark " + ProgramVersion.number());
         for (String property : List.of("java.version", "java.vendor.version", "os.name", "os.version", "os.arch",
@@ -64,12 +66,16 @@ final class SupportCommand implements Callable<Integer> {
         check.defects().forEach(defect -> lines.add("defect " + defect.code()));
         lines.add("");
         lines.addAll(Diary.read(folder));
-        try {
-            Files.write(out, lines, StandardCharsets.UTF_8);
-        } catch (IOException e) {
-            throw new Refused(Defect.in("", "file-unwritable", out.toString()));
-        }
+        write(String.join(System.lineSeparator(), lines) + System.lineSeparator());
         surroundings.say("command.support.written", out);
         return ExitCode.FINE;
+    }
+
+    private void write(String text) {
+        try {
+            new SafeFile(FileLayer.disk(), out, false).write(file -> file.write(text.getBytes(StandardCharsets.UTF_8)));
+        } catch (IOException e) {
+            throw new Refused(Defect.in("", "file-unwritable", out.toString()), e);
+        }
     }
 }

@@ -31,6 +31,11 @@ public final class StoreFolder {
         this.iterations = iterations;
     }
 
+    /** Whether a store is there. */
+    public boolean holdsStore() {
+        return files.exists(folder.resolve(Ledger.JOURNAL));
+    }
+
     /** Whether it holds a store that takes a passphrase. */
     public boolean sealed() {
         return new PassphraseFile(folder, files).exists();

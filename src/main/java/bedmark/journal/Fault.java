@@ -3,9 +3,11 @@ package bedmark.journal;
 import bedmark.document.Defect;
 import java.io.IOException;
 import java.nio.file.AccessDeniedException;
+import java.nio.file.FileSystemException;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.stream.Stream;
 
 /**
@@ -43,7 +45,8 @@ public enum Fault {
     public static Fault of(IOException failure, FileLayer files, Path folder) {
         String message = String.valueOf(failure.getMessage()).toLowerCase(Locale.ROOT);
         if (!files.exists(folder)) {
-            return VANISHED;
+            // One that could not be made in a folder where nothing may be written was never there.
+            return failure instanceof AccessDeniedException ? READ_ONLY : VANISHED;
         }
         if (says(message, "no space left", "not enough space", "quota") || full(files, folder)) {
             return DISK_FULL;
@@ -70,9 +73,12 @@ public enum Fault {
         return Defect.in(folder.toString(), prefix + "-" + fault.code, told);
     }
 
-    private static String reason(IOException failure) {
-        return failure.getMessage() == null ? failure.getClass().getSimpleName()
-                : failure.getMessage().lines().findFirst().orElse("");
+    /** The system's own reason, without the path that a sentence names anyway; the kind of failure without one. */
+    public static String reason(Exception failure) {
+        Optional<String> given = failure instanceof FileSystemException file
+                ? Optional.ofNullable(file.getReason()) : Optional.ofNullable(failure.getMessage());
+        return given.flatMap(text -> text.lines().findFirst()).filter(text -> !text.isBlank())
+                .orElse(failure.getClass().getSimpleName());
     }
 
     private static boolean says(String message, String... parts) {

@@ -9,7 +9,6 @@ import java.io.IOException;
 import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardOpenOption;
 import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.LinkedHashMap;
@@ -144,12 +143,17 @@ public final class ReferenceData {
         contents.keySet().stream().filter(Files::exists).findFirst().ifPresent(there -> {
             throw new Refused(Defect.in(there.toString(), "reference-file-exists"));
         });
+        List<Path> begun = new ArrayList<>();
         try {
             Files.createDirectories(folder);
             for (Map.Entry<Path, byte[]> file : contents.entrySet()) {
-                Files.write(file.getKey(), file.getValue(), StandardOpenOption.CREATE_NEW);
+                Files.createFile(file.getKey());
+                begun.add(file.getKey());
+                Files.write(file.getKey(), file.getValue());
             }
         } catch (IOException e) {
+            // A part of them would stand in the way of the next attempt.
+            begun.forEach(file -> file.toFile().delete());
             throw new Refused(Defect.in(folder.toString(), "folder-unwritable"), e);
         }
         return List.copyOf(contents.keySet());

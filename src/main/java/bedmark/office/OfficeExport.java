@@ -5,9 +5,11 @@ import bedmark.document.Defect;
 import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.journal.Digest;
+import bedmark.journal.Fault;
+import bedmark.journal.NamedPath;
+import bedmark.journal.Progress;
 import bedmark.json.AssessmentWriter;
 import bedmark.json.JsonWriter;
-import bedmark.journal.Progress;
 import bedmark.office.FlatColumn.FlatRow;
 import bedmark.survey.merge.Copy;
 import java.io.IOException;
@@ -20,10 +22,12 @@ import java.nio.file.StandardOpenOption;
 import java.time.Instant;
 import java.time.ZoneOffset;
 import java.time.format.DateTimeFormatter;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import java.util.stream.Stream;
 
 /**
  * Everything that came, as files that any analysis engine reads: line-delimited JSON with the whole survey and its
@@ -32,6 +36,10 @@ import java.util.TreeMap;
  */
 public final class OfficeExport {
     private static final int AT_ONCE = 500;
+    private static final String DICTIONARY = "data-dictionary.csv";
+    private static final String REGISTERS = "registers";
+    private static final String JSON = "json";
+    private static final String TABLE = "table";
     /** How long a folder name may be before it is cut: the systems that we know take 255 bytes. */
     private static final int LONGEST_NAME = 160;
     private static final int HEAD_OF_NAME = 80;
@@ -48,21 +56,47 @@ public final class OfficeExport {
      *
      * @param out a folder that is not there yet, or is empty
      * @return the number of surveys
-     * @throws Refused {@code export-folder-full}, {@code export-not-saved}
+     * @throws Refused {@code folder-is-file}, {@code folder-unreadable}, {@code export-folder-full},
+     *                 {@code export-not-saved}; the folder is empty then, so that it can be tried again
      */
     public long write(Path out, Progress progress) {
         try {
+            if (Files.exists(out)) {
+                NamedPath.requireFolder(out);
+            }
             Files.createDirectories(out);
-            try (var held = Files.list(out)) {
+            try (Stream<Path> held = Files.list(out)) {
                 if (held.findAny().isPresent()) {
                     throw new Refused(Defect.in(out.toString(), "export-folder-full"));
                 }
             }
-            Files.writeString(out.resolve("data-dictionary.csv"), dictionary());
-            registers(out.resolve("registers"));
-            return surveys(out, progress);
+            return write(out, out.resolve(DICTIONARY), progress);
         } catch (IOException e) {
-            throw new Refused(Defect.in(out.toString(), "export-not-saved", String.valueOf(e.getMessage())), e);
+            throw new Refused(Defect.in(out.toString(), "export-not-saved", Fault.reason(e)), e);
+        }
+    }
+
+    private long write(Path out, Path dictionary, Progress progress) throws IOException {
+        try {
+            Files.writeString(dictionary, dictionary());
+            registers(out.resolve(REGISTERS));
+            return surveys(out, progress);
+        } catch (IOException | RuntimeException e) {
+            // The folder was empty: what lies in it is a part of this export.
+            dictionary.toFile().delete();
+            for (String part : List.of(REGISTERS, JSON, TABLE)) {
+                clear(out.resolve(part));
+            }
+            throw e;
+        }
+    }
+
+    /** Deletes what can be deleted, the innermost first. */
+    private static void clear(Path folder) throws IOException {
+        if (Files.exists(folder)) {
+            try (Stream<Path> held = Files.walk(folder)) {
+                held.sorted(Comparator.reverseOrder()).forEach(one -> one.toFile().delete());
+            }
         }
     }
 
@@ -93,8 +127,8 @@ public final class OfficeExport {
                 table.computeIfAbsent(part, key -> new StringBuilder()).append(Csv.row(FlatColumn.ALL.stream()
                         .map(column -> column.cell().apply(row)).toList()));
             }
-            append(out.resolve("json"), "surveys.jsonl", json, "");
-            append(out.resolve("table"), "surveys.csv", table,
+            append(out.resolve(JSON), "surveys.jsonl", json, "");
+            append(out.resolve(TABLE), "surveys.csv", table,
                     Csv.row(FlatColumn.ALL.stream().map(FlatColumn::name).toList()));
         }
         progress.at(digests.size(), digests.size());

@@ -73,7 +73,7 @@ final class OfficeOpening {
     private static void checkFree(Path folder, FileLayer files) throws IOException {
         if (files.exists(folder.resolve(DeviceFile.NAME))) {
             throw new Refused(Defect.in(folder.toString(), "store-of-tablet"));
-        } else if (Files.isRegularFile(folder)) {
+        } else if (Files.exists(folder) && !Files.isDirectory(folder)) {
             throw new Refused(Defect.in(folder.toString(), "store-is-file"));
         } else if (files.exists(folder) && files.list(folder).stream().map(file -> file.getFileName().toString())
                 .anyMatch(name -> !BEGUN.contains(name) && !name.startsWith(OFFICE) && !name.startsWith("."))) {

@@ -2,6 +2,7 @@ package bedmark.pack;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -61,7 +62,7 @@ public final class DeviceKey {
             new SafeFile(disk, file, true).write(out -> out.write(made.text()));
             return made;
         } catch (IOException e) {
-            throw new Refused(Defect.in(file.toString(), "device-key-not-saved", WriteFailure.reason(e)), e);
+            throw new Refused(Defect.in(file.toString(), "device-key-not-saved", Fault.reason(e)), e);
         } catch (GeneralSecurityException e) {
             throw new IllegalStateException(e);
         }
@@ -83,7 +84,7 @@ public final class DeviceKey {
                 }
             }
         } catch (IOException e) {
-            throw new Refused(Defect.in(file.toString(), "device-key-unreadable", WriteFailure.reason(e)), e);
+            throw new Refused(Defect.in(file.toString(), "device-key-unreadable", Fault.reason(e)), e);
         } catch (IllegalArgumentException | GeneralSecurityException | Refused e) {
             throw new Refused(Defect.in(file.toString(), "device-key-damaged"), e);
         }

@@ -2,6 +2,7 @@ package bedmark.pack;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Fault;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.file.Files;
@@ -26,7 +27,7 @@ public final class PackDigest {
         try (DigestOutputStream out = new DigestOutputStream(OutputStream.nullOutputStream(), digest)) {
             Files.copy(file, out);
         } catch (IOException e) {
-            throw new Refused(Defect.in(file.toString(), "pack-unreadable", WriteFailure.reason(e)), e);
+            throw new Refused(Defect.in(file.toString(), "pack-unreadable", Fault.reason(e)), e);
         }
         return HexFormat.of().formatHex(digest.digest());
     }

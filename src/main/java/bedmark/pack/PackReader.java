@@ -2,6 +2,7 @@ package bedmark.pack;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Fault;
 import bedmark.journal.Progress;
 import bedmark.json.JsonReader;
 import bedmark.survey.Bundle;
@@ -57,7 +58,7 @@ public final class PackReader {
         } catch (ClosedByInterruptException e) {
             throw new Refused(Defect.in("", "pack-cancelled"), e);
         } catch (IOException e) {
-            throw new Refused(Defect.in(file.toString(), "pack-unreadable", WriteFailure.reason(e)), e);
+            throw new Refused(Defect.in(file.toString(), "pack-unreadable", Fault.reason(e)), e);
         }
     }
 

@@ -3,6 +3,7 @@ package bedmark.pack;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.journal.FileLayer;
+import bedmark.journal.NamedPath;
 import bedmark.journal.Progress;
 import bedmark.json.JsonWriter;
 import bedmark.survey.Bundle;
@@ -62,7 +63,7 @@ public final class PackWriter {
      * @throws Refused where something is missing or wrong in bundle or photos ({@code key-absent},
      *                 {@code pack-photo-…}, {@code name-…}, {@code zip-…}), or the folder takes no pack
      *                 ({@code pack-folder-missing}, {@code pack-folder-read-only}, {@code pack-disk-full},
-     *                 {@code pack-target-folder}, {@code pack-not-saved}), or {@code pack-cancelled}
+     *                 {@code pack-target-folder}, {@code file-not-plain}, {@code pack-not-saved}), or {@code pack-cancelled}
      */
     public static WrittenPack write(Bundle bundle, PhotoSource photos, DeviceKey key, Path out, Progress progress) {
         return new PackWriter(FileLayer.disk()).writePack(bundle, photos, key, out, progress);
@@ -93,6 +94,7 @@ public final class PackWriter {
         } else if (!Files.isDirectory(target.getParent())) {
             throw new Refused(Defect.in(target.getParent().toString(), "pack-folder-missing"));
         }
+        NamedPath.requireTarget(target);
     }
 
     /** The files that are small, in the order of the pack. */

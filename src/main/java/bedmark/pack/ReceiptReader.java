@@ -3,6 +3,7 @@ package bedmark.pack;
 import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Fault;
 import bedmark.json.ReceiptText;
 import java.io.IOException;
 import java.io.InputStream;
@@ -35,7 +36,7 @@ public final class ReceiptReader {
         try (InputStream in = Files.newInputStream(file)) {
             bytes = in.readNBytes(LONGEST + 1);
         } catch (IOException e) {
-            throw new Refused(Defect.in(file.toString(), "receipt-unreadable", WriteFailure.reason(e)), e);
+            throw new Refused(Defect.in(file.toString(), "receipt-unreadable", Fault.reason(e)), e);
         }
         if (bytes.length > LONGEST) {
             throw new Refused(Defect.in(file.toString(), "receipt-too-large", Integer.toString(LONGEST)));

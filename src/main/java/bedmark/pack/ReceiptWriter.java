@@ -63,7 +63,7 @@ public final class ReceiptWriter {
             case VANISHED -> Defect.in(where, "receipt-vanished");
             case DISK_FULL -> Defect.in(where, "receipt-disk-full");
             case READ_ONLY -> Defect.in(where, "receipt-read-only");
-            case FORCE_FAILED, FAILED -> Defect.in(where, "receipt-not-saved", WriteFailure.reason(failure));
+            case FORCE_FAILED, FAILED -> Defect.in(where, "receipt-not-saved", Fault.reason(failure));
         };
     }
 }

@@ -5,6 +5,7 @@ import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
+import bedmark.journal.NamedPath;
 import bedmark.json.RoundText;
 import java.io.IOException;
 import java.io.InputStream;
@@ -38,7 +39,7 @@ public record RoundFile(Branch document, Fingerprint fingerprint) {
         try (InputStream in = Files.newInputStream(file)) {
             bytes = in.readNBytes(LONGEST + 1);
         } catch (IOException e) {
-            throw new Refused(Defect.in(file.toString(), "round-file-unreadable", WriteFailure.reason(e)), e);
+            throw new Refused(Defect.in(file.toString(), "round-file-unreadable", Fault.reason(e)), e);
         }
         if (bytes.length > LONGEST) {
             throw new Refused(Defect.in(file.toString(), "round-file-too-large", Integer.toString(LONGEST >> 20)));
@@ -53,13 +54,18 @@ public record RoundFile(Branch document, Fingerprint fingerprint) {
      * @param document all keys but {@code key} and {@code signature}
      * @param out      the file, in a folder that exists
      * @return the file's exact bytes
-     * @throws Refused what {@link RoundText#read} would refuse, {@code folder-absent}, {@code round-file-…}
+     * @throws Refused what {@link RoundText#read} would refuse, {@code file-is-folder}, {@code file-not-plain},
+     *                 {@code folder-absent}, {@code round-file-…}; a file that was there is as it was
      */
     public static byte[] write(Branch document, DeviceKey office, Path out) {
+        return write(document, office, out, FileLayer.disk());
+    }
+
+    static byte[] write(Branch document, DeviceKey office, Path out, FileLayer disk) {
         byte[] text = SignedJson.text(document, office);
         RoundText.read(text);
-        FileLayer disk = FileLayer.disk();
         Path target = out.toAbsolutePath();
+        NamedPath.requireTarget(target);
         try {
             if (!Files.isDirectory(target.getParent())) {
                 throw new Refused(Defect.in(target.getParent().toString(), "folder-absent"));

@@ -10,19 +10,26 @@ import java.nio.file.Path;
 import java.util.UUID;
 
 /** Writes a file so that its name stands for the whole of it or does not stand there at all. */
-final class SafeFile {
+public final class SafeFile {
     private final FileLayer disk;
     private final Path target;
     private final boolean ownerOnly;
 
-    SafeFile(FileLayer disk, Path target, boolean ownerOnly) {
+    /**
+     * A file to be.
+     *
+     * @param target    in a folder that is there
+     * @param ownerOnly whether nobody else may read it, where the system knows such rights
+     */
+    public SafeFile(FileLayer disk, Path target, boolean ownerOnly) {
         this.disk = disk;
         this.target = target.toAbsolutePath();
         this.ownerOnly = ownerOnly;
     }
 
     /** What fills the file. */
-    interface Content {
+    @FunctionalInterface
+    public interface Content {
         void writeTo(OutputStream out) throws IOException;
     }
 
@@ -30,7 +37,7 @@ final class SafeFile {
      * Writes beside the target, forces, moves, forces the folder. After a failure before the move nothing is left;
      * after a failure of the last step the whole new file stands there, though a power cut might still take it.
      */
-    void write(Content content) throws IOException {
+    public void write(Content content) throws IOException {
         Path folder = target.getParent();
         clearLeftovers(folder);
         Path part = folder.resolve(partPrefix() + UUID.randomUUID().toString().substring(0, 8) + ".part");

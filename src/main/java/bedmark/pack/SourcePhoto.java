@@ -2,6 +2,7 @@ package bedmark.pack;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Fault;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.channels.ClosedByInterruptException;
@@ -115,6 +116,6 @@ record SourcePhoto(PackedPhoto claim, PhotoSource.Photo photo, long crc) {
 
     private static Refused unreadable(PackedPhoto claim, IOException e) {
         return new Refused(e instanceof ClosedByInterruptException ? Defect.in("", "pack-cancelled")
-                : Defect.in(EntryName.shown(claim.name()), "pack-photo-unreadable", WriteFailure.reason(e)), e);
+                : Defect.in(EntryName.shown(claim.name()), "pack-photo-unreadable", Fault.reason(e)), e);
     }
 }

@@ -6,9 +6,7 @@ import bedmark.journal.Fault;
 import bedmark.journal.FileLayer;
 import java.io.IOException;
 import java.nio.channels.ClosedByInterruptException;
-import java.nio.file.FileSystemException;
 import java.nio.file.Path;
-import java.util.Optional;
 
 /** Finds out why a folder took no pack, so that the person can be told what to do. */
 final class WriteFailure {
@@ -26,15 +24,7 @@ final class WriteFailure {
             case VANISHED -> Defect.in(where, "pack-folder-missing");
             case DISK_FULL -> Defect.in(where, "pack-disk-full");
             case READ_ONLY -> Defect.in(where, "pack-folder-read-only");
-            case FORCE_FAILED, FAILED -> Defect.in(where, "pack-not-saved", reason(failure));
+            case FORCE_FAILED, FAILED -> Defect.in(where, "pack-not-saved", Fault.reason(failure));
         }, failure);
-    }
-
-    /** The system's own reason, without the path that the sentence names anyway. */
-    static String reason(Exception failure) {
-        Optional<String> given = failure instanceof FileSystemException file
-                ? Optional.ofNullable(file.getReason()) : Optional.ofNullable(failure.getMessage());
-        return given.flatMap(text -> text.lines().findFirst()).filter(text -> !text.isBlank())
-                .orElse(failure.getClass().getSimpleName());
     }
 }

@@ -2,6 +2,7 @@ package bedmark.report;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import bedmark.report.table.CsvTable;
 import bedmark.report.table.WorkbookFile;
 import java.io.BufferedOutputStream;
@@ -43,14 +44,11 @@ public final class ReportFile {
      * Writes a report.
      *
      * @return whether it was written; where it was stopped, everything is as before
-     * @throws Refused {@code file-is-folder}, {@code report-unwritable}
+     * @throws Refused {@code file-is-folder}, {@code file-not-plain}, {@code report-unwritable}
      */
     public static boolean write(Path out, Kind kind, ReportContent content, ReportOptions options) {
         Path file = out.toAbsolutePath();
-        if (Files.isDirectory(file)) {
-            // An empty folder would give way to the file.
-            throw new Refused(Defect.in(out.toString(), "file-is-folder"));
-        }
+        NamedPath.requireTarget(out);
         Path part = file.resolveSibling(file.getFileName() + ".part");
         try {
             OutputStream opened = Files.newOutputStream(part);

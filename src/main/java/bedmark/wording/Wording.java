@@ -103,8 +103,9 @@ public record Wording(Words words, UnitSystem units, Map<Unit, Unit> liked) {
     }
 
     /**
-     * A defect in one sentence; a detail that is a code of its own is put in words ({@code code.detail}). A newer
-     * program may have written one down that this one has no words for.
+     * A defect in one sentence; a detail that is a code of its own is put in words ({@code code.detail}), and so is the
+     * system's kind of failure where that is all that is known ({@code reason.detail}). A newer program may have written
+     * one down that this one has no words for.
      */
     public String sentence(Defect defect) {
         if (!words.has("defect." + defect.code())) {
@@ -116,7 +117,8 @@ public record Wording(Words words, UnitSystem units, Map<Unit, Unit> liked) {
             arguments[i + 1] = defect.details().get(i);
         }
         for (int i = 1; i < arguments.length; i++) {
-            String key = "defect." + defect.code() + "." + arguments[i];
+            String own = "defect." + defect.code() + "." + arguments[i];
+            String key = words.has(own) ? own : "defect.reason." + arguments[i];
             arguments[i] = words.has(key) ? text(key, arguments) : arguments[i];
         }
         return plain(text("defect." + defect.code(), arguments));

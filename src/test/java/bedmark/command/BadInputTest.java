@@ -159,7 +159,7 @@ class BadInputTest {
         String[][] lines = {{"forms", "check", plain}, {"reference", "check", plain}, {"store", "check", plain},
             {"store", "rebuild", plain}, {"office", "check", plain}, {"support", plain, "--out", plain + "2"},
             {"store", "backup", plain, "--to", temp.toString()}, {"store", "receipt", plain, plain},
-            {"store", "restore", plain, "--to", plain + "2"}};
+            {"store", "restore", plain, "--to", plain + "2"}, {"store", "restore", temp.toString(), "--to", plain}};
         for (String[] line : lines) {
             assertSentence(Terminal.run(line), plain + ": this is a file; name a folder");
         }

@@ -1,6 +1,8 @@
 package bedmark.command;
 
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.command.Terminal.Result;
@@ -10,6 +12,9 @@ import bedmark.office.Offices;
 import bedmark.survey.Bundle;
 import java.io.IOException;
 import java.math.BigDecimal;
+import java.net.StandardProtocolFamily;
+import java.net.UnixDomainSocketAddress;
+import java.nio.channels.ServerSocketChannel;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -440,6 +445,76 @@ class OfficeCommandsTest {
         }
         Result beside = office("receive", packs.toString(), "--receipts", plain.toString());
         assertTrue(beside.err().contains(plain + ": this is a file; name a folder."), beside::err);
+    }
+
+    private static List<String> names(Path folder) throws IOException {
+        try (Stream<Path> files = Files.list(folder)) {
+            return files.map(file -> file.getFileName().toString()).sorted().toList();
+        }
+    }
+
+    /** A socket stands for every device: under root nothing else refuses to be written. */
+    @Test
+    void aRoundFileThatCanNotBeWrittenIsRefusedAndTheEarlierOneIsWhole() throws IOException {
+        received();
+        Path rounds = Files.createDirectories(folder.resolve("rounds/empty.round.json")).getParent();
+        Path earlier = rounds.resolve("next.round.json");
+        assertEquals(0, office("round", "--out", earlier.toString()).code());
+        byte[] whole = Files.readAllBytes(earlier);
+        Path device = rounds.resolve("s");
+        try (ServerSocketChannel socket = ServerSocketChannel.open(StandardProtocolFamily.UNIX)) {
+            socket.bind(UnixDomainSocketAddress.of(device));
+            String[][] refusals = {{rounds.resolve("empty.round.json").toString(), "this is a folder; name a file"},
+                {rounds.toString(), "this is a folder; name a file"}, {"/", "/: this is a folder; name a file"},
+                {rounds.resolve("gone/next.round.json").toString(), "gone: there is no such folder"},
+                {earlier.resolve("next.round.json").toString(), "next.round.json: there is no such folder"},
+                {device.toString(), "this is a device or a pipe and no file"}};
+            for (String[] refusal : refusals) {
+                Result refused = office("round", "--out", refusal[0]);
+                assertEquals(3, refused.code(), refusal[0]);
+                assertEquals(1, refused.err().lines().count(), refused.err());
+                assertTrue(refused.err().contains(refusal[1]), refused.err());
+                assertEquals("", refused.out());
+            }
+            for (String[] line : new String[][] {{"report", "--out", device + ".pdf"}, {"export", "--out", "" + device},
+                {"export-register", "--out", "" + device}}) {
+                Files.deleteIfExists(rounds.resolve("s.pdf"));
+                Files.createSymbolicLink(rounds.resolve("s.pdf"), device);
+                Result refused = office(line);
+                assertEquals(3, refused.code(), line[0]);
+                assertEquals(1, refused.err().lines().count(), refused.err());
+            }
+            assertFalse(Files.isRegularFile(device));
+            assertArrayEquals(whole, Files.readAllBytes(earlier));
+            assertEquals(List.of("empty.round.json", "next.round.json", "s", "s.pdf"), names(rounds));
+        }
+    }
+
+    @Test
+    void aRegisterOfWhichATableCanNotBeWrittenLeavesTheEarlierTables() throws IOException {
+        received();
+        Path out = folder.resolve("register");
+        assertEquals(0, office("export-register", "--out", out.toString()).code());
+        List<String> tables = names(out);
+        Files.writeString(out.resolve("areas.csv"), "mine");
+        Files.delete(out.resolve("transfers.csv"));
+        Files.createDirectory(out.resolve("transfers.csv"));
+        Result refused = office("export-register", "--out", out.toString());
+        assertEquals(3, refused.code());
+        assertTrue(refused.err().contains("transfers.csv: this is a folder; name a file"), refused.err());
+        assertEquals("mine", Files.readString(out.resolve("areas.csv")));
+        assertEquals(tables, names(out));
+    }
+
+    @Test
+    void aStoreThatIsNoFolderAndNoKnownServerIsRefused() throws IOException {
+        Result server = Terminal.run("office", "rank", "--store", "jdbc:mysql:bedmark");
+        assertEquals(2, server.code());
+        assertTrue(server.err().contains("'jdbc:mysql:bedmark' names a server that is not known"), server.err());
+        assertFalse(Files.exists(Path.of("jdbc:mysql:bedmark")));
+        Result device = Terminal.run("office", "rank", "--store", "/dev/null");
+        assertEquals(3, device.code());
+        assertTrue(device.err().contains("/dev/null is a file and no folder"), device.err());
     }
 
     @Test

@@ -132,6 +132,9 @@ class StoreCommandsTest {
         fine("store", "restore", stick.toString(), "--to", other.toString(), "--passphrase-file", fresh.toString());
         assertTrue(fine("store", "check", other.toString(), "--passphrase-file", fresh.toString()).out()
                 .contains("is encrypted"));
+        Terminal.Result none = fine("store", "encrypt", temp.resolve("hoem").toString(), "--passphrase-file",
+                secret.toString());
+        assertTrue(none.out().contains("hoem: a new, empty store was made there"), none.out());
         Path shorter = Files.writeString(temp.resolve("short.txt"), "short");
         assertEquals(3, Terminal.run("store", "encrypt", temp.resolve("new").toString(), "--passphrase-file",
                 shorter.toString()).code());

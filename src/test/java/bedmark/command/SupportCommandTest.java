@@ -47,6 +47,9 @@ class SupportCommandTest {
         assertEquals(3, result.code());
         assertEquals(1, result.err().lines().count(), result.err());
         assertTrue(result.err().contains("gone/support.txt"), result.err());
+        Terminal.Result onFolder = Terminal.run("support", store.toString(), "--out", folder.toString());
+        assertEquals(3, onFolder.code());
+        assertTrue(onFolder.err().contains(folder + ": this is a folder; name a file."), onFolder.err());
     }
 
     @Test

@@ -1,5 +1,6 @@
 package bedmark.journal;
 
+import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -8,7 +9,10 @@ import java.io.IOException;
 import java.net.StandardProtocolFamily;
 import java.net.UnixDomainSocketAddress;
 import java.nio.channels.ServerSocketChannel;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -28,5 +32,20 @@ class DiskLayerTest {
             assertFalse(Files.isRegularFile(device));
             assertTrue(Files.exists(from));
         }
+    }
+
+    @Test
+    void aFolderThatNobodyMayMakeIsNotSaidToBeGone() {
+        Path never = folder.resolve("never");
+        assertEquals(Fault.READ_ONLY, Fault.of(new AccessDeniedException(never.toString()), FileLayer.disk(), never));
+        assertEquals(Fault.VANISHED, Fault.of(new NoSuchFileException(never.toString()), FileLayer.disk(), never));
+    }
+
+    @Test
+    void aReasonIsTheSystemsOwnWithoutThePath() {
+        assertEquals("File name too long",
+                Fault.reason(new FileSystemException("/stick/a.part", null, "File name too long")));
+        assertEquals("AccessDeniedException", Fault.reason(new AccessDeniedException("/stick/a.part")));
+        assertEquals("IOException", Fault.reason(new IOException()));
     }
 }

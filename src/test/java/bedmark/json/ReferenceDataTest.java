@@ -60,6 +60,17 @@ class ReferenceDataTest {
         return JsonReader.read(("{\"materials\": " + materials + "}").getBytes(StandardCharsets.UTF_8)).root();
     }
 
+    /** A link to nowhere is no file that is there, and still none can be made in its place. */
+    @Test
+    void whatCanNotAllBeWrittenLeavesNoPartOfIt() throws IOException {
+        Path other = Files.createDirectory(temp.resolve("other"));
+        Files.createSymbolicLink(other.resolve(ReferenceFile.values()[2].fileName()), temp.resolve("nowhere/x"));
+        assertEquals("folder-unwritable", assertThrows(Refused.class, () -> ReferenceData.write(other)).defect().code());
+        try (Stream<Path> files = Files.list(other)) {
+            assertEquals(1, files.count());
+        }
+    }
+
     @Test
     void shippedFilesAreTheEnginesDefaults() {
         assertEquals(Settings.standard(), ReferenceData.shipped().settings());

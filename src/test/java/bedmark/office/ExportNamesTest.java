@@ -3,9 +3,12 @@ package bedmark.office;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import static org.junit.jupiter.api.Assertions.assertNotEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
+import bedmark.document.Defect;
+import bedmark.document.Refused;
 import bedmark.journal.Progress;
 import bedmark.office.register.Table;
 import bedmark.office.register.Tables;
@@ -44,6 +47,25 @@ class ExportNamesTest {
             List<Path> surveys = files.filter(file -> file.endsWith("surveys.jsonl")).toList();
             assertEquals(1, surveys.size());
             assertEquals(document.branches("surveys").size(), Files.readAllLines(surveys.get(0)).size());
+        }
+    }
+
+    @Test
+    void anExportThatIsCutShortLeavesItsFolderEmptyForTheNextAttempt(@TempDir Path folder) throws IOException {
+        Path pack = Offices.pack(Offices.sample("round-2026-03"), folder.resolve("tablet"), folder.resolve("a.zip"));
+        Path out = Files.createDirectory(folder.resolve("out"));
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), folder.resolve("tablet"))) {
+            store.receive(pack, "Ida Marsh");
+            Progress full = (done, total) -> {
+                if (done == total) {
+                    throw new Refused(Defect.in(out.toString(), "export-not-saved", "No space left on device"));
+                }
+            };
+            assertThrows(Refused.class, () -> new OfficeExport(store).write(out, full));
+            try (Stream<Path> files = Files.list(out)) {
+                assertEquals(List.of(), files.toList());
+            }
+            assertEquals(25, new OfficeExport(store).write(out, Progress.NONE));
         }
     }
 

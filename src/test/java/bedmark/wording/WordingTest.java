@@ -41,6 +41,13 @@ class WordingTest {
     }
 
     @Test
+    void aKindOfFailureAmongTheDetailsIsPutInWords() {
+        Defect defect = Defect.in("/stick", "export-not-saved", "AccessDeniedException");
+        assertTrue(ENGLISH.sentence(defect).contains("(no right to it)"), ENGLISH.sentence(defect));
+        assertTrue(SPANISH.sentence(defect).contains("(sin permiso)"), SPANISH.sentence(defect));
+    }
+
+    @Test
     void sentenceIsOneLineWhateverTheInputBrings() {
         assertEquals("At /x: material \"a b c\" is not in the register; name one of its materials.",
                 ENGLISH.sentence(Defect.in("/x", "material-unknown", "a\nb\u001bc")));

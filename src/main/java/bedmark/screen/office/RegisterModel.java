@@ -8,13 +8,11 @@ import bedmark.office.RoundDesk;
 import bedmark.office.register.Draft;
 import bedmark.office.register.RegisterChange;
 import bedmark.office.register.RegisterDesk;
+import bedmark.office.register.RegisterFolder;
 import bedmark.office.register.RegisterGrid;
 import bedmark.office.register.RegisterImport;
-import bedmark.office.register.RegisterTables;
 import bedmark.pack.RoundFile;
 import bedmark.screen.office.RegisterLine.Shown;
-import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
@@ -284,15 +282,8 @@ public final class RegisterModel {
     public void write(Path folder) {
         Optional<String> id = plant.get();
         desk.ask(progress -> {
-            try {
-                for (Map.Entry<String, String> file : RegisterTables.of(head(id)).entrySet()) {
-                    Files.writeString(folder.resolve(file.getKey()), file.getValue());
-                }
-                return folder;
-            } catch (IOException e) {
-                throw new Refused(Defect.in(folder.toString(), "export-not-saved", String.valueOf(e.getMessage())),
-                        e);
-            }
+            RegisterFolder.write(head(id), folder);
+            return folder;
         }, done -> written.set(Optional.of(done)));
     }
 

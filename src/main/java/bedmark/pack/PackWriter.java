@@ -63,7 +63,8 @@ public final class PackWriter {
      * @throws Refused where something is missing or wrong in bundle or photos ({@code key-absent},
      *                 {@code pack-photo-…}, {@code name-…}, {@code zip-…}), or the folder takes no pack
      *                 ({@code pack-folder-missing}, {@code pack-folder-read-only}, {@code pack-disk-full},
-     *                 {@code pack-target-folder}, {@code file-not-plain}, {@code pack-not-saved}), or {@code pack-cancelled}
+     *                 {@code pack-target-folder}, {@code file-not-plain}, {@code pack-not-saved}),
+     *                 or {@code pack-cancelled}
      */
     public static WrittenPack write(Bundle bundle, PhotoSource photos, DeviceKey key, Path out, Progress progress) {
         return new PackWriter(FileLayer.disk()).writePack(bundle, photos, key, out, progress);

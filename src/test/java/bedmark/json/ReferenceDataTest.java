@@ -65,7 +65,8 @@ class ReferenceDataTest {
     void whatCanNotAllBeWrittenLeavesNoPartOfIt() throws IOException {
         Path other = Files.createDirectory(temp.resolve("other"));
         Files.createSymbolicLink(other.resolve(ReferenceFile.values()[2].fileName()), temp.resolve("nowhere/x"));
-        assertEquals("folder-unwritable", assertThrows(Refused.class, () -> ReferenceData.write(other)).defect().code());
+        assertEquals("folder-unwritable",
+                assertThrows(Refused.class, () -> ReferenceData.write(other)).defect().code());
         try (Stream<Path> files = Files.list(other)) {
             assertEquals(1, files.count());
         }

@@ -7,7 +7,6 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
-import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.engine.verdict.Level;
 import bedmark.journal.Digest;
@@ -250,25 +249,8 @@ class OfficeStoreTest {
     @Test
     void anIdThatNotEveryDatabaseHoldsIsRefusedInOneSentence() {
         try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
-            assertEquals("id-too-long", refusal(store, "r".repeat(201)));
-            assertEquals("id-control-character", refusal(store, "r\0"));
-            assertEquals(List.of(), store.packs());
-            assertInstanceOf(Received.Taken.class, receivedRound(store, "r".repeat(200)));
+            new IdBounds(store, tablet(), folder).prove();
         }
-    }
-
-    private String refusal(OfficeStore store, String round) {
-        return assertInstanceOf(Received.Turned.class, receivedRound(store, round)).why().code();
-    }
-
-    private Received receivedRound(OfficeStore store, String round) {
-        Bundle bundle = Offices.sample("round-2026-03");
-        Branch survey = bundle.document().branches("surveys").get(0).with("round", round);
-        Node rounds = new Node.Series(List.of(Branch.EMPTY.with("id", round)
-                .with("points", new Node.Series(List.of()))));
-        Path pack = Offices.pack(new Bundle(bundle.document().with("rounds", rounds).with("surveys",
-                new Node.Series(List.of(survey)))), tablet(), folder.resolve(round.length() + ".zip"));
-        return store.receive(List.of(pack), "Ida Marsh", Progress.NONE).get(0);
     }
 
     @Test

@@ -118,6 +118,7 @@ class SharedOfficeTest {
             assertEquals(report(alone, folder.resolve("report-alone")), report(shared, folder.resolve("report-shared")));
             desksThatChangeOneRegisterDoNotReplaceEachOther(shared);
             whatOneDeskRefusedAnotherSees(shared);
+            new IdBounds(shared, keys[0], folder).prove();
         }
     }
 

@@ -32,7 +32,8 @@ class RoundFileTest {
     }
 
     private void refused(String code, Branch document, DeviceKey key, Path out, FailingDisk disk) {
-        assertEquals(code, assertThrows(Refused.class, () -> RoundFile.write(document, key, out, disk)).defect().code());
+        assertEquals(code, assertThrows(Refused.class, () ->
+                RoundFile.write(document, key, out, disk)).defect().code());
     }
 
     @Test

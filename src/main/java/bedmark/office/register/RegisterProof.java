@@ -24,13 +24,24 @@ final class RegisterProof {
     private static final Map<String, String> REFERENCES = Map.of("areas", "area", "materials", "material",
             "conveyors", "conveyor");
 
+    /** What names a row where a factor does; factors have no id. */
+    private static final String FACTORS = "siteFactors";
+
     private final Map<String, Map<String, Branch>> before;
     private final Map<String, Map<String, Branch>> now;
+    private final List<Branch> factors;
 
-    /** @param now the lists as they become, by name and id; may still change between the questions */
-    RegisterProof(Map<String, Map<String, Branch>> before, Map<String, Map<String, Branch>> now) {
+    /**
+     * A proof of a change.
+     *
+     * @param now     the lists as they become, by name and id; may still change between the questions
+     * @param factors the factors that the site fitted, which no list shows
+     */
+    RegisterProof(Map<String, Map<String, Branch>> before, Map<String, Map<String, Branch>> now,
+                  List<Branch> factors) {
         this.before = before;
         this.now = now;
+        this.factors = List.copyOf(factors);
     }
 
     /** What is wrong with one row that says something new. */
@@ -57,7 +68,15 @@ final class RegisterProof {
                         .anyMatch(point -> names(point, "transfer", id)))
                 : now.get("transfers").values().stream().filter(row -> REFERENCES.containsKey(list)
                         && names(row, REFERENCES.get(list), id));
-        return users.findFirst().map(row -> Defect.in(where, "row-still-used", row.text("id").orElse("")));
+        return users.findFirst().map(row -> row.text("id").orElse(""))
+                .or(() -> factors.stream().anyMatch(row -> REFERENCES.containsKey(list)
+                        && fitted(row, REFERENCES.get(list), id)) ? Optional.of(FACTORS) : Optional.empty())
+                .map(user -> Defect.in(where, "row-still-used", user));
+    }
+
+    /** A factor holds for what it names, and each pair of readings behind it may name the drive that it was read at. */
+    private static boolean fitted(Branch factor, String key, String id) {
+        return names(factor, key, id) || factor.branches("pairs").stream().anyMatch(pair -> names(pair, key, id));
     }
 
     private static boolean names(Branch row, String key, String id) {

@@ -23,7 +23,7 @@ final class RegisterRows {
     private final List<Defect> defects;
     private final Map<String, Map<String, Branch>> held = new LinkedHashMap<>();
     private final Map<String, Map<String, Branch>> lists = new LinkedHashMap<>();
-    private final RegisterProof proof = new RegisterProof(held, lists);
+    private final RegisterProof proof;
     private final Map<String, Map<String, String>> places = new HashMap<>();
     private final Set<String> roundsBegun = new LinkedHashSet<>();
     private Optional<String> released = Optional.empty();
@@ -39,6 +39,8 @@ final class RegisterRows {
     RegisterRows(Branch before, List<Defect> defects) {
         this.before = before;
         this.defects = defects;
+        this.proof = new RegisterProof(held, lists, before.branch("plant").orElse(Branch.EMPTY)
+                .branches("siteFactors"));
         for (String list : Column.LISTS.keySet()) {
             Map<String, Branch> rows = RegisterLists.of(before, list);
             held.put(list, Map.copyOf(rows));

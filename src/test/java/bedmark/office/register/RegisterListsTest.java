@@ -11,6 +11,7 @@ import bedmark.office.Offices;
 import java.io.IOException;
 import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -119,6 +120,34 @@ class RegisterListsTest {
         assertEquals(List.of("row-still-used"), codes(removed(HEAD, "areas", "quarry")));
         assertEquals(List.of("row-still-used"), codes(removed(HEAD, "transfers", "TP-01")), "a round names it");
         assertEquals(List.of("row-plant-stays"), codes(removed(HEAD, "plant", "ostermere")));
+    }
+
+    @Test
+    void aRowThatOnlyAFittedFactorNamesStays() throws IOException {
+        Branch longer = draft("materials", "id,name", "slag,Slag").head();
+        Branch plant = longer.branch("plant").orElseThrow();
+        Branch conveyor = plant.branches("conveyors").get(0).with("id", "C99").without("tag").without("assetId");
+        List<Node> conveyors = new ArrayList<>(plant.series("conveyors"));
+        conveyors.add(conveyor);
+        Node factors = new Node.Series(List.of(factor("material", "slag"), factor("conveyor", "C99")));
+        Branch named = longer.with("plant", plant.with("conveyors", new Node.Series(conveyors))
+                .with("siteFactors", factors));
+        Branch pairs = named.with("plant", named.branch("plant").orElseThrow().with("siteFactors", new Node.Series(
+                List.of(factor("material", "slag").with("pairs", new Node.Series(List.of(
+                        Branch.EMPTY.with("conveyor", "C99"))))))));
+        assertEquals(List.of("row-still-used"), codes(removed(pairs, "conveyors", "C99")), "a pair was read there");
+        for (String[] row : new String[][] {{"materials", "slag"}, {"conveyors", "C99"}}) {
+            Draft refused = removed(named, row[0], row[1]);
+            assertEquals(List.of("row-still-used"), codes(refused), row[1]);
+            assertEquals(List.of("siteFactors"), refused.defects().get(0).details());
+            Branch without = named.with("plant", named.branch("plant").orElseThrow().without("siteFactors"));
+            assertEquals(List.of(), codes(removed(without, row[0], row[1])), "nothing else names it");
+        }
+    }
+
+    private static Branch factor(String key, String id) {
+        return Branch.EMPTY.with(key, id).with("factor", Node.number(2)).with("standardUncertainty", Node.number(1))
+                .with("fittedAt", "2026-03-01T08:30:00+01:00");
     }
 
     @Test

@@ -4,6 +4,7 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.json.JsonWriter;
 import bedmark.office.Conflict;
+import bedmark.report.SideTelling;
 import bedmark.wording.Wording;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
@@ -12,25 +13,25 @@ import java.util.List;
 /** The conflicts that wait, as text and as JSON lines. */
 final class ConflictText {
     private final Wording wording;
+    private final SideTelling telling;
 
     ConflictText(Wording wording) {
         this.wording = wording;
+        this.telling = new SideTelling(wording);
     }
 
     void print(List<Conflict> conflicts, PrintWriter out) {
         for (Conflict conflict : conflicts) {
-            out.println(Wording.plain(wording.text("office.settle." + conflict.kind().code(), conflict.names().plant(),
-                    conflict.names().zone().plant(), conflict.names().tag(), conflict.names().zone().transfer())));
+            out.println(Wording.plain(wording.text("office.settle.zone", conflict.names().plant(),
+                    conflict.names().zone().plant(), conflict.names().tag(), conflict.names().zone().transfer(),
+                    telling.kind(conflict))));
             conflict.sides().forEach(side -> out.println("  " + Wording.plain(line(side))));
         }
         out.println(wording.text("office.settle.count", conflicts.size()));
     }
 
     private String line(Conflict.Side side) {
-        return wording.text("office.settle.side", side.copy().digest(), Integer.toString(side.copy().revision()),
-                side.survey().inspector().filter(name -> !name.isBlank()).orElse("-"),
-                side.survey().completedAt().map(Object::toString).orElse("-"),
-                side.level().map(level -> wording.text("verdict.level." + level.code())).orElse("-"));
+        return side.copy().digest() + "  " + String.join("; ", telling.side(side));
     }
 
     /** One conflict as a JSON object in one line; what is not known is absent. */

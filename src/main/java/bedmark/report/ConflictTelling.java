@@ -2,17 +2,12 @@ package bedmark.report;
 
 import bedmark.document.Branch;
 import bedmark.document.Node;
-import bedmark.engine.Result;
-import bedmark.engine.uncertainty.Estimate;
 import bedmark.form.FieldForm;
-import bedmark.office.Conflict;
 import bedmark.office.Difference;
-import bedmark.quantity.Dimension;
 import bedmark.wording.Wording;
-import java.util.ArrayList;
 import java.util.List;
 
-/** The sides of a conflict in words, in one person's language and units. */
+/** What the sides of a conflict say differently, in one person's language and units. */
 public final class ConflictTelling {
     private static final String NOTHING = "–";
     /** What a quantity carries beside its number, which is named after it. */
@@ -25,22 +20,6 @@ public final class ConflictTelling {
     public ConflictTelling(Wording wording, FieldForm form) {
         this.wording = wording;
         this.form = form;
-    }
-
-    /** Who recorded a side and when, where it came from, and what it comes to. */
-    public List<String> side(Conflict.Side side) {
-        List<String> lines = new ArrayList<>();
-        String revision = Integer.toString(side.copy().revision());
-        lines.add(side.survey().completedAt().map(at -> wording.text("office.side.completed", revision,
-                wording.moment(at))).orElseGet(() -> wording.text("office.side.open", revision)));
-        lines.add(wording.text("office.side.from", side.survey().inspector().filter(name -> !name.isBlank())
-                .orElse(NOTHING), side.device().isBlank() ? NOTHING : side.device()));
-        lines.add(side.judged().map(judged -> {
-            String level = wording.text("verdict.level." + judged.level().code());
-            return judged.get(Result.SKIRT_DRAG).map(Estimate::value).map(drag -> wording.text("office.side.result",
-                    level, wording.computed(drag, wording.unit(Dimension.FORCE)))).orElse(level);
-        }).orElseGet(() -> wording.text("office.side.no-result")));
-        return lines;
     }
 
     /** What people call the thing that is said differently. */

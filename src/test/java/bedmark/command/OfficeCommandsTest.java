@@ -352,6 +352,10 @@ class OfficeCommandsTest {
                 line.contains(side.text("digest").orElseThrow())
                         && line.contains(original.text("inspector").orElseThrow())), text::out));
         assertEquals(4, text.out().lines().count(), text::out);
+        List<String> said = text.out().lines().toList();
+        assertTrue(said.get(0).endsWith(": One revision of a survey came with different contents."), said.get(0));
+        assertTrue(said.get(1).matches(" +[0-9a-f]{64} {2}Revision 1, completed \\d+ Mar 2026, \\d\\d:\\d\\d; By .+, "
+                + "from Tablet 3; Within limits; drag of the skirts .+N"), said.get(1));
         String zone = conflict.text("transfer").orElseThrow();
         String side = conflict.branches("sides").get(1).text("digest").orElseThrow();
         assertEquals(2, office("settle", zone, side).code());

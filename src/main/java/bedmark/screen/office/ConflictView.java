@@ -5,6 +5,7 @@ import bedmark.json.SurveyForm;
 import bedmark.office.Conflict;
 import bedmark.office.Difference;
 import bedmark.report.ConflictTelling;
+import bedmark.report.SideTelling;
 import bedmark.screen.part.ActionButton;
 import bedmark.screen.part.Texts;
 import bedmark.screen.part.Weight;
@@ -29,7 +30,8 @@ final class ConflictView extends VBox {
     ConflictView(Conflict conflict, List<Branch> forms, Wording wording, Consumer<String> settle) {
         getStyleClass().add("conflict");
         ConflictTelling telling = new ConflictTelling(wording, SurveyForm.of(conflict.sides().get(0).survey(), forms));
-        Label kind = Texts.wrapped(wording.text("office.side.kind." + conflict.kind().code()));
+        SideTelling sides = new SideTelling(wording);
+        Label kind = Texts.wrapped(sides.kind(conflict));
         grid.getStyleClass().add("sides");
         columns(conflict.sides().size());
         List<Difference> differences = conflict.differences();
@@ -47,7 +49,7 @@ final class ConflictView extends VBox {
             Conflict.Side side = conflict.sides().get(i);
             VBox card = new VBox();
             card.getStyleClass().add("side-card");
-            telling.side(side).forEach(line -> card.getChildren().add(Texts.wrapped(line)));
+            sides.side(side).forEach(line -> card.getChildren().add(Texts.wrapped(line)));
             grid.add(card, i + 1, 0);
             grid.add(button(side, wording, settle), i + 1, row + 1);
         }

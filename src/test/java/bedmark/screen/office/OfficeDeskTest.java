@@ -12,6 +12,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.CopyOnWriteArrayList;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.Executor;
 import java.util.concurrent.TimeUnit;
@@ -71,12 +72,14 @@ class OfficeDeskTest {
         try (OfficeDesk desk = desk(Runnable::run)) {
             CompletableFuture<Defect> told = new CompletableFuture<>();
             desk.troubleProperty().addListener((property, before, now) -> now.ifPresent(told::complete));
+            List<Number> shares = new CopyOnWriteArrayList<>();
+            desk.progressProperty().addListener((property, before, now) -> shares.add(now));
             desk.ask(progress -> {
                 progress.at(1, 2);
                 throw new IllegalStateException("what a person wrote");
             }, answer -> { });
             assertEquals("office-work-failed", come(told).code());
-            assertEquals(-1, desk.progressProperty().get());
+            assertEquals(List.of(0.0, 0.5, -1.0), shares);
             List<String> noted = Diary.read(desk.store().folder());
             assertTrue(noted.get(0).endsWith(" failed java.lang.IllegalStateException"), noted::toString);
             assertTrue(noted.stream().noneMatch(line -> line.contains("a person")), noted::toString);

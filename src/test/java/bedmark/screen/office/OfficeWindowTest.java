@@ -6,33 +6,45 @@ import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
+import bedmark.engine.verdict.Rule;
 import bedmark.journal.Progress;
 import bedmark.office.Answered;
 import bedmark.office.OfficeOptions;
 import bedmark.office.OfficeStore;
 import bedmark.office.Offices;
+import bedmark.office.RankQuery;
 import bedmark.office.RankedZone;
 import bedmark.quantity.Quantity;
 import bedmark.quantity.Unit;
 import bedmark.screen.Glass;
 import bedmark.screen.Lighting;
 import bedmark.survey.Bundle;
+import bedmark.survey.OfficeDeed;
+import bedmark.survey.merge.Copy;
+import bedmark.survey.merge.ZoneId;
 import java.math.BigDecimal;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Duration;
 import java.time.Instant;
 import java.time.InstantSource;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.TimeUnit;
 import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.Function;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import javafx.scene.Node;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.DatePicker;
+import javafx.scene.control.Label;
 import javafx.scene.control.ListView;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
@@ -41,11 +53,15 @@ import javafx.scene.control.skin.DatePickerSkin;
 import javafx.scene.input.KeyCode;
 import javafx.scene.layout.Region;
 import javafx.scene.paint.Paint;
+import org.apache.pdfbox.Loader;
+import org.apache.pdfbox.pdmodel.PDDocument;
+import org.apache.pdfbox.pdmodel.common.PDRectangle;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.testfx.util.WaitForAsyncUtils;
 
 /** The office's screens, driven by clicks and keys on a headless glass. */
 class OfficeWindowTest {
@@ -201,6 +217,13 @@ class OfficeWindowTest {
             assertTrue(window.words().matches("(?s).*remedies save [^;]*\u00A0MWh \\([^;]*\u00A0EUR\\); most "
                     + "at TP-[0-9]+: (free the bed|set the boards wider|lower the feed|renew the worn seals), "
                     + ".*\u00A0MWh .*"), window.words());
+            assertTrue(window.words().contains("C1"), window.words());
+            window.click("by-area");
+            List<String> areas = window.desk().store().registers().get("ostermere").document().branches("areas").stream()
+                    .map(area -> area.text("name").orElseThrow()).toList();
+            Set<String> bars = Glass.on(() -> window.shell().scene().getRoot().lookupAll(".bars .zone-name").stream()
+                    .map(name -> ((Label) name).getText()).collect(Collectors.toSet()));
+            assertEquals(Set.copyOf(areas), bars);
             String before = window.words();
             Files.copy(packs.resolve("round-under-way.zip"), inbox.resolve("b.zip"));
             window.until(() -> !window.words().equals(before));
@@ -234,6 +257,7 @@ class OfficeWindowTest {
             ListView<?> list = (ListView<?>) window.node("zones");
             window.until(() -> list.getItems().size() == 24);
             RankedZone worst = (RankedZone) list.getItems().get(0);
+            eachFilterNarrowsTheListAlone(window);
             Glass.on(() -> {
                 window.shell().zone(worst.zone());
                 return null;
@@ -248,13 +272,60 @@ class OfficeWindowTest {
             window.type("boards are on order");
             window.click("accept-" + rule);
             assertTrue(window.words().contains("Accepted by Ida Marsh"), window.words());
+            window.click("reopen-" + rule);
+            assertEquals(List.of(), answers(window, worst));
+            window.click("until");
+            window.type("2027-01-31");
+            window.click("shelve-" + rule);
+            assertTrue(window.words().contains("Shelved by Ida Marsh, until 31 Jan 2027: boards are on order"),
+                    window.words());
+            assertEquals(OfficeDeed.Answer.SHELVED, answers(window, worst).get(0).answer());
             window.click("action-text");
             window.type("Set the boards wider");
             window.click("action-add");
-            assertEquals("Set the boards wider", window.desk().store().actions().get(0).text());
+            OfficeDeed.ActionSet added = window.desk().store().actions().get(0);
+            assertEquals("Set the boards wider", added.text());
+            window.click("done-" + added.action());
+            assertTrue(window.desk().store().actions().get(0).done());
+            assertFalse(window.words().contains("Set the boards wider"), window.words());
             window.click("back");
-            assertFalse(window.desk().store().ranked(worst.zone()).orElseThrow().answers().isEmpty());
+            assertFalse(answers(window, worst).isEmpty());
         }
+    }
+
+    private static void eachFilterNarrowsTheListAlone(OfficeWindow window) throws Exception {
+        Map<String, Function<Object, RankQuery>> filters = Map.of(
+                "filter-area", area -> RankQuery.ALL.ofArea(Optional.of((String) area)),
+                "filter-material", material -> RankQuery.ALL.ofMaterial(Optional.of((String) material)),
+                "filter-finding", rule -> RankQuery.ALL.with(Optional.of((Rule) rule)),
+                "filter-age", days -> RankQuery.ALL.olderThan(Optional.of(Duration.ofDays((Integer) days))));
+        for (Map.Entry<String, Function<Object, RankQuery>> filter : filters.entrySet()) {
+            ComboBox<?> box = (ComboBox<?>) window.node(filter.getKey());
+            RankQuery query = filter.getValue().apply(((Optional<?>) box.getItems().get(2)).orElseThrow());
+            List<ZoneId> wanted = zones(window.desk().store().rank(query, Progress.NONE));
+            assertTrue(wanted.size() < 24, filter.getKey());
+            pick(window, filter.getKey(), 2);
+            window.until(() -> zones(listed(window)).equals(wanted));
+            pick(window, filter.getKey(), 0);
+            window.until(() -> listed(window).size() == 24);
+        }
+    }
+
+    private static List<RankedZone> listed(OfficeWindow window) throws Exception {
+        return ((ListView<?>) window.node("zones")).getItems().stream().map(RankedZone.class::cast).toList();
+    }
+
+    private static List<ZoneId> zones(List<RankedZone> ranked) {
+        return ranked.stream().map(RankedZone::zone).toList();
+    }
+
+    private static void pick(OfficeWindow window, String id, int choice) throws Exception {
+        ComboBox<?> box = (ComboBox<?>) window.node(id);
+        Glass.on(() -> {
+            box.getSelectionModel().select(choice);
+            return null;
+        });
+        window.settle();
     }
 
     private RankedZone worst(OfficeWindow window) throws Exception {
@@ -406,9 +477,13 @@ class OfficeWindowTest {
             }
             window.click("clash-reason");
             window.type("the first was signed off");
-            window.click("settle-" + window.desk().store().merged(zone.zone()).clashes().get(0).sides().get(0)
-                    .digest().substring(0, 12));
+            List<String> sides = window.desk().store().merged(zone.zone()).clashes().get(0).sides().stream()
+                    .map(Copy::digest).toList();
+            window.click("settle-" + sides.get(0).substring(0, 12));
             assertEquals(0, window.desk().store().ranked(zone.zone()).orElseThrow().clashes());
+            List<String> counting = window.desk().store().merged(zone.zone()).visits().stream().map(Copy::digest)
+                    .toList();
+            assertTrue(counting.contains(sides.get(0)) && !counting.contains(sides.get(1)), "the side that was chosen");
         }
     }
 
@@ -648,8 +723,10 @@ class OfficeWindowTest {
             List<Path> written = files.sorted().toList();
             assertEquals(2, written.size());
             assertTrue(Files.readString(written.get(0)).contains("TP-01"));
-            assertTrue(new String(Files.readAllBytes(written.get(1)), StandardCharsets.ISO_8859_1)
-                    .startsWith("%PDF-"));
+            try (PDDocument pages = Loader.loadPDF(written.get(1).toFile())) {
+                assertTrue(pages.getDocumentCatalog().getLanguage().startsWith("es"), "the language that was chosen");
+                assertEquals(PDRectangle.LETTER.getWidth(), pages.getPage(0).getMediaBox().getWidth(), 0.5);
+            }
         }
     }
 
@@ -665,6 +742,28 @@ class OfficeWindowTest {
                 return null;
             });
             window.until(() -> window.desk().store().packs().size() == 2);
+            workUnderWayIsStoppedByItsButton(window);
         }
+    }
+
+    private static void workUnderWayIsStoppedByItsButton(OfficeWindow window) throws Exception {
+        CompletableFuture<Boolean> stopped = new CompletableFuture<>();
+        Glass.on(() -> {
+            window.desk().ask(progress -> {
+                progress.at(1, 2);
+                while (!progress.cancelled()) {
+                    Thread.onSpinWait();
+                }
+                return true;
+            }, stopped::complete);
+            return null;
+        });
+        Node button = window.shell().scene().lookup("#cancel");
+        WaitForAsyncUtils.waitFor(1, TimeUnit.MINUTES, () -> button.getParent().isVisible());
+        WaitForAsyncUtils.waitForFxEvents();
+        window.robot().clickOn(button);
+        assertTrue(stopped.get(1, TimeUnit.MINUTES));
+        window.settle();
+        assertFalse(button.getParent().isVisible(), "nothing is under way any more");
     }
 }

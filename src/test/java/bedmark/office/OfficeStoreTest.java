@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
+import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.engine.verdict.Level;
 import bedmark.journal.Digest;

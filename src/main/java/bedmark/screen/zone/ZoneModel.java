@@ -9,7 +9,6 @@ import bedmark.form.SpeedField;
 import bedmark.quantity.BeltState;
 import bedmark.quantity.Quality;
 import bedmark.quantity.Quantity;
-import bedmark.quantity.QuantityFormat;
 import bedmark.quantity.TypedNumber;
 import bedmark.quantity.Unit;
 import bedmark.quantity.UnitSystem;
@@ -26,8 +25,6 @@ import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
-import javafx.beans.property.SimpleObjectProperty;
-import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 import javafx.beans.value.ObservableValue;
 
@@ -40,7 +37,7 @@ public final class ZoneModel {
     private final ZoneSetting setting;
     private final List<Assessor.Seen> companions;
     private final SpeedWays ways = new SpeedWays();
-    private final UnitChoice unitChoice = new UnitChoice();
+    private final CellInHand hand;
     private final Set<Pointer> believed = new HashSet<>();
     private final Judging judging;
     private final Slots layout;
@@ -49,14 +46,8 @@ public final class ZoneModel {
     private final BooleanBinding undoable;
     private final ReadOnlyObjectWrapper<Branch> survey;
     private final ReadOnlyObjectWrapper<List<SlotRow>> rows;
-    private final ReadOnlyObjectWrapper<InHand> inHand = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<Outcome> outcome;
     private final ReadOnlyObjectWrapper<Optional<Note>> note = new ReadOnlyObjectWrapper<>(Optional.empty());
-    private final LastTyping lastTyping = new LastTyping();
-    private final StringProperty typed = new SimpleStringProperty("");
-    private final ObjectProperty<UnitSystem> units = new SimpleObjectProperty<>(UnitSystem.METRIC);
-    private final ObjectProperty<Locale> locale = new SimpleObjectProperty<>(Locale.ENGLISH);
-    private final ObjectProperty<Optional<BeltState>> beltState = new SimpleObjectProperty<>(Optional.empty());
 
     /**
      * The cell that is filled in now.
@@ -79,17 +70,19 @@ public final class ZoneModel {
         this.layout = new Slots(setting.form());
         this.work = new SurveyInWork(setting.history(), setting.scribe(), setting.person());
         this.tables = new Tables(this, work, setting.last());
-        this.units.set(units);
-        this.locale.set(locale);
+        this.hand = new CellInHand(setting.clock(), units, locale);
         this.survey = new ReadOnlyObjectWrapper<>(document());
         this.rows = new ReadOnlyObjectWrapper<>(layOut());
         this.outcome = new ReadOnlyObjectWrapper<>(judge(document()));
         work.documentProperty().addListener((property, before, now) -> refresh());
-        typed.addListener((property, before, now) -> preview());
-        beltState.addListener((property, before, now) -> preview());
-        this.undoable = typed.isNotEmpty().or(work.undoableProperty());
-        this.units.addListener((property, before, now) -> unitChanged());
-        this.locale.addListener((property, before, now) -> localeChanged(before));
+        hand.typedProperty().addListener((property, before, now) -> preview());
+        hand.beltStateProperty().addListener((property, before, now) -> preview());
+        this.undoable = hand.typedProperty().isNotEmpty().or(work.undoableProperty());
+        hand.unitsProperty().addListener((property, before, now) -> hand.followUnits(document()));
+        hand.localeProperty().addListener((property, before, now) -> {
+            hand.translate(before);
+            preview();
+        });
         activateFirst();
     }
 
@@ -130,12 +123,12 @@ public final class ZoneModel {
 
     /** The cell that is filled in now; there always is one. */
     public ReadOnlyObjectProperty<InHand> inHandProperty() {
-        return inHand.getReadOnlyProperty();
+        return hand.property();
     }
 
     /** The active cell. */
     public Slot active() {
-        return inHand.get().slot();
+        return hand.slot();
     }
 
     public ReadOnlyObjectProperty<Outcome> outcomeProperty() {
@@ -153,20 +146,20 @@ public final class ZoneModel {
 
     /** What is typed into the active cell; empty where nothing was typed since it became active. */
     public StringProperty typedProperty() {
-        return typed;
+        return hand.typedProperty();
     }
 
     public ObjectProperty<UnitSystem> unitsProperty() {
-        return units;
+        return hand.unitsProperty();
     }
 
     public ObjectProperty<Locale> localeProperty() {
-        return locale;
+        return hand.localeProperty();
     }
 
     /** What the belt does now, as the person says. */
     public ReadOnlyObjectProperty<Optional<BeltState>> beltStateProperty() {
-        return beltState;
+        return hand.beltStateProperty();
     }
 
     public SurveyHistory history() {
@@ -195,13 +188,12 @@ public final class ZoneModel {
     }
 
     private void show(Slot slot) {
-        if (inHand.get() != null && slot.equals(active()) && !typed.get().isEmpty()) {
+        if (hand.isTypedInto(slot)) {
             // A number that is not finished keeps its cell in hand, with the note that says why.
-            inHand.set(new InHand(slot, inHand.get().unit()));
+            hand.hold();
             return;
         }
-        typed.set("");
-        inHand.set(new InHand(slot, unitOf(slot)));
+        hand.take(slot, document());
         note.set(firstJudgement(slot));
     }
 
@@ -259,7 +251,7 @@ public final class ZoneModel {
      * @return false where the typing is no number; it then stays in the pad and the note says why
      */
     public boolean keep() {
-        if (typed.get().isEmpty() || !open()) {
+        if (hand.untouched() || !open()) {
             return true;
         }
         Typing.Read read = read();
@@ -267,10 +259,10 @@ public final class ZoneModel {
             note.set(read.rejected().map(Note.NoNumber::new));
             return false;
         }
-        String was = typed.get();
+        String was = hand.typedProperty().get();
         set(active().where(), read.answer());
-        if (typed.get().equals(was)) {
-            typed.set("");
+        if (hand.typedProperty().get().equals(was)) {
+            hand.clear();
         }
         return true;
     }
@@ -287,29 +279,26 @@ public final class ZoneModel {
 
     /** What stands in the active cell, as the pad edits it: the locale's decimal sign, no other signs. */
     public String editable() {
-        return typed.get().isEmpty() ? typing().editable(answer(active()), inHand.get().unit()) : typed.get();
+        return hand.editable(answer(active()));
     }
 
     /** Changes the number in the active cell by one step of its unit. */
     public void step(int direction) {
-        typing().stepped(inHand.get(), editable(), direction).ifPresent(typed::set);
+        hand.step(direction, answer(active()));
     }
 
     Typing typing() {
-        return new Typing(locale.get(), setting.clock(), beltState.get());
+        return hand.typing();
     }
 
     /** Goes on to the next unit that the active cell can be typed in; what is typed is not converted. */
     public void switchUnit() {
-        if (active() instanceof Slot.MeasureSlot measured) {
-            List<Unit> offered = measured.measure().units();
-            chooseUnit(offered.get((offered.indexOf(unit()) + 1) % offered.size()));
-        }
+        hand.nextUnit().ifPresent(this::chooseUnit);
     }
 
     /** Clears the active cell. */
     public void clear() {
-        typed.set("");
+        hand.clear();
         if (!(active() instanceof Slot.WaySlot)) {
             set(active(), Optional.empty());
         }
@@ -344,8 +333,8 @@ public final class ZoneModel {
 
     /** Takes back the typing, or else the newest change that still counts. */
     public void undo() {
-        if (!typed.get().isEmpty()) {
-            typed.set("");
+        if (!hand.untouched()) {
+            hand.clear();
         } else {
             work.undo(this::activate);
         }
@@ -360,7 +349,7 @@ public final class ZoneModel {
 
     /** Says what the belt does now; readings from here on carry it. */
     public void sayBeltState(BeltState state) {
-        beltState.set(Optional.of(state));
+        hand.beltStateProperty().set(Optional.of(state));
     }
 
     /** Marks the active reading. A depth is measured on an isolated belt only. */
@@ -368,7 +357,8 @@ public final class ZoneModel {
         Slot slot = active();
         keep();
         Optional<Quantity> reading = quantity(document(), slot.where());
-        boolean running = beltState.get().or(() -> reading.flatMap(Quantity::beltState))
+        Optional<BeltState> said = hand.beltStateProperty().get();
+        boolean running = said.or(() -> reading.flatMap(Quantity::beltState))
                 .map(BeltState::running).orElse(true);
         if (Typing.isDepth(slot) && quality == Quality.MEASURED && running) {
             note.set(Optional.of(new Note.IsolateFirst()));
@@ -376,51 +366,25 @@ public final class ZoneModel {
         }
         reading.ifPresent(read -> {
             Quantity marked = read.withQuality(quality);
-            set(slot.where(), Optional.of(Branch.write(beltState.get().map(marked::withBeltState).orElse(marked))));
+            set(slot.where(), Optional.of(Branch.write(said.map(marked::withBeltState).orElse(marked))));
         });
     }
 
     /** Types on in another unit; what stands in the cell keeps the unit that it was entered in. */
     public void chooseUnit(Unit chosen) {
-        unitChoice.choose(active(), chosen);
-        inHand.set(new InHand(active(), Optional.of(chosen)));
+        hand.choose(chosen);
         preview();
-    }
-
-    /** What is typed keeps its meaning: the decimal sign of the one number format becomes that of the other. */
-    private void localeChanged(Locale before) {
-        char old = new QuantityFormat(before).decimalSign();
-        char now = new QuantityFormat(locale.get()).decimalSign();
-        if (old != now && !(active() instanceof Slot.TextSlot)) {
-            typed.set(typed.get().replace(old, now));
-        }
-        preview();
-    }
-
-    private void unitChanged() {
-        if (typed.get().isEmpty()) {
-            inHand.set(new InHand(active(), unitOf(active())));
-        }
-    }
-
-    private Optional<Unit> unitOf(Slot slot) {
-        return unitChoice.of(slot, document(), units.get());
     }
 
     /** The unit that a number is asked in first: the one that the person likes, where the form has it. */
     Unit offered(Measure measure) {
-        return unitChoice.offered(measure, units.get());
+        return hand.offered(measure);
     }
 
     /** Asks first in the unit that the person likes better than a usual one. */
     void likeUnits(UnaryOperator<Unit> better) {
-        unitChoice.like(better);
-        unitChanged();
-    }
-
-    /** The unit in which the active cell is typed; only where it is a number with a unit. */
-    private Unit unit() {
-        return inHand.get().unit().orElseThrow();
+        hand.like(better);
+        hand.followUnits(document());
     }
 
     private void refresh() {
@@ -435,7 +399,7 @@ public final class ZoneModel {
     private void preview() {
         Typing.Read read = read();
         note.set(read.rejected().filter(reason -> reason != TypedNumber.Reason.UNFINISHED)
-                .<Note>map(Note.NoNumber::new).or(() -> typed.get().isEmpty() ? note.get() : Optional.empty()));
+                .<Note>map(Note.NoNumber::new).or(() -> hand.untouched() ? note.get() : Optional.empty()));
         Branch now = read.answer().map(answer -> Answers.change(document(), active().where(), Optional.of(answer))
                 .in(document())).orElseGet(this::document);
         if (!Objects.equals(survey.get(), now)) {
@@ -447,13 +411,8 @@ public final class ZoneModel {
 
     /** What the typing comes to; nothing while nothing is typed. */
     private Typing.Read read() {
-        if (typed.get().isEmpty()) {
-            lastTyping.forget();
-            return Typing.Read.NOTHING;
-        }
-        boolean suspect = quantity(document(), active().where()).flatMap(Quantity::quality)
-                .filter(Quality.SUSPECT::equals).isPresent();
-        return lastTyping.read(typing(), inHand.get(), typed.get(), suspect);
+        return hand.read(quantity(document(), active().where()).flatMap(Quantity::quality)
+                .filter(Quality.SUSPECT::equals).isPresent());
     }
 
     private Outcome judge(Branch document) {

@@ -2,6 +2,7 @@ package bedmark.screen.office;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.NamedPath;
 import bedmark.office.register.Draft;
 import bedmark.office.register.Meanings;
 import bedmark.office.register.RegisterDesk;
@@ -53,6 +54,7 @@ final class ImportModel {
     }
 
     private static List<Path> files(Path folder) {
+        NamedPath.requireFolder(folder);
         try (Stream<Path> held = Files.list(folder)) {
             List<Path> files = held.filter(file -> file.getFileName().toString().toLowerCase(Locale.ROOT)
                     .matches(".*\\.(csv|xlsx)")).sorted().toList();
@@ -61,7 +63,7 @@ final class ImportModel {
             }
             return files;
         } catch (IOException e) {
-            throw new Refused(Defect.in(folder.toString(), "folder-absent"), e);
+            throw new Refused(Defect.in(folder.toString(), "folder-unreadable"), e);
         }
     }
 

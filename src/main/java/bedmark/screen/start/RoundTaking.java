@@ -5,6 +5,7 @@ import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.index.Store;
 import bedmark.index.SurveyQuery;
+import bedmark.journal.NamedPath;
 import bedmark.journal.NotSaved;
 import bedmark.pack.RoundFile;
 import bedmark.screen.Workplace;
@@ -90,13 +91,14 @@ public final class RoundTaking {
     }
 
     private static Path newest(Path folder) {
+        NamedPath.requireFolder(folder);
         try (Stream<Path> files = Files.list(folder)) {
             return files.filter(file -> file.getFileName().toString().endsWith(RoundFile.ENDING))
                     .max(Comparator.comparing((Path file) -> file.toFile().lastModified())
                             .thenComparing(Path::getFileName))
                     .orElseThrow(() -> new Refused(Defect.in(folder.toString(), "round-file-none")));
         } catch (IOException e) {
-            throw new Refused(Defect.in(folder.toString(), "folder-absent"), e);
+            throw new Refused(Defect.in(folder.toString(), "folder-unreadable"), e);
         }
     }
 

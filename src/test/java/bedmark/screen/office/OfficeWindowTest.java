@@ -219,8 +219,8 @@ class OfficeWindowTest {
                     + ".*\u00A0MWh .*"), window.words());
             assertTrue(window.words().contains("C1"), window.words());
             window.click("by-area");
-            List<String> areas = window.desk().store().registers().get("ostermere").document().branches("areas").stream()
-                    .map(area -> area.text("name").orElseThrow()).toList();
+            List<String> areas = plant(window).branches("areas").stream().map(area -> area.text("name").orElseThrow())
+                    .toList();
             Set<String> bars = Glass.on(() -> window.shell().scene().getRoot().lookupAll(".bars .zone-name").stream()
                     .map(name -> ((Label) name).getText()).collect(Collectors.toSet()));
             assertEquals(Set.copyOf(areas), bars);
@@ -500,6 +500,7 @@ class OfficeWindowTest {
             window.click("import");
             window.until(() -> window.words().contains("is no number"));
             window.click("leave-draft");
+            assertFalse(window.words().contains("is no number"), window.words());
             Files.writeString(folder.resolve("out/transfers.csv"), "id,conveyor,skirtSpacing\nTP-01,C1,870 mm\n");
             window.click("import");
             window.click("take-draft");

@@ -75,7 +75,6 @@ public final class ReceivedRow extends HBox {
             words.getChildren().add(Texts.wrapped(wording.text("office.receive.known", here.device())));
         } else if (received instanceof Received.Turned turned) {
             words.getChildren().add(Texts.wrapped(wording.sentence(turned.why())));
-            // The question whether to trust a tablet names it already.
             turned.unsaid().ifPresent(sender -> words.getChildren()
                     .add(Texts.wrapped(Wording.plain(wording.text("office.sender." + sender.code(), sender.told())))));
             if (!turned.kept()) {

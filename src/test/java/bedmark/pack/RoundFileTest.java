@@ -3,6 +3,7 @@ package bedmark.pack;
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
 import bedmark.document.Node;
@@ -45,6 +46,7 @@ class RoundFileTest {
         FailingDisk counting = new FailingDisk(0, false, IOException::new);
         Path other = folder.resolve("other.round.json");
         RoundFile.write(later, key, other, counting);
+        assertTrue(counting.steps.contains("move"), "it takes its place in one step");
         int moved = counting.steps.indexOf("move") + 1;
         for (int step = 1; step <= moved; step++) {
             refused("round-file-disk-full", later, key, out, new FailingDisk(step, step % 2 == 0,

@@ -105,7 +105,7 @@ final class OfficeReceiveCommand implements Callable<Integer> {
             say("", "office.receive.taken", taken.file(), taken.device(), taken.fresh(), taken.known());
             taken.clashes().forEach(this::tell);
             if (taken.clock() > 0) {
-                say("  ", "office.receive.clock", taken.device(), Math.max(1, taken.clock() / 60));
+                say("  ", "office.receive.clock", taken.clockTold());
             }
         } else if (received instanceof Received.AlreadyHere here) {
             say("", "office.receive.here", here.file(), here.device());

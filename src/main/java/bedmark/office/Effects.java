@@ -135,6 +135,9 @@ final class Effects implements Books.Effect {
 
     /** Says what counts of zones by what the tables hold of them. */
     static void stand(OfficeTables tables, Collection<ZoneId> zones, Minutes minutes) {
+        if (zones.isEmpty()) {
+            return;
+        }
         List<Copy> copies = tables.copies(zones);
         Set<String> aside = minutes.setAside();
         List<Standing> standings = Merge.zones(copies, aside).values().stream().map(Standings::of).toList();

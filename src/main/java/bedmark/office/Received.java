@@ -30,6 +30,11 @@ public sealed interface Received {
         public Taken {
             clashes = List.copyOf(clashes);
         }
+
+        /** How far the clock was ahead, as the words name it: the tablet, minutes from one on, and whole days. */
+        public Object[] clockTold() {
+            return new Object[] {device, Math.max(1, clock / 60), clock / 86_400};
+        }
     }
 
     /** What the office confirms to the tablet, where it took the pack in, now or before. */

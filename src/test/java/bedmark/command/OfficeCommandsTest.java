@@ -335,6 +335,18 @@ class OfficeCommandsTest {
     }
 
     @Test
+    void aFastClockIsToldInMinutesOrInDays() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        List<Branch> one = bundle.document().branches("surveys").subList(0, 1);
+        Offices.pack(Offices.with(bundle, "two hours", "2026-10-01T11:42:07Z", one), folder.resolve("tablet"),
+                packs.resolve("c.zip"));
+        Offices.pack(Offices.with(bundle, "nine days", "2026-10-10T20:42:07Z", one), folder.resolve("tablet"),
+                packs.resolve("d.zip"));
+        String told = received().out();
+        assertTrue(told.contains("was 120 minutes ahead of this office's") && told.contains("was 9 days ahead"), told);
+    }
+
+    @Test
     void conflictsAreListedWithTheDigestByWhichEachSideIsChosen() {
         Bundle bundle = Offices.sample("round-2026-03");
         Branch original = bundle.document().branches("surveys").get(0);

@@ -107,8 +107,7 @@ public final class ReceivedRow extends HBox {
                 taken.known())));
         taken.clashes().forEach(clash -> words.getChildren().add(Texts.trouble(clash(clash))));
         if (taken.clock() > 0) {
-            words.getChildren().add(Texts.trouble(wording.text("office.receive.clock", taken.device(),
-                    Math.max(1, taken.clock() / 60))));
+            words.getChildren().add(Texts.trouble(wording.text("office.receive.clock", taken.clockTold())));
         }
     }
 

@@ -12,8 +12,7 @@ update survey set came = (select cast(floor(extract(epoch from cast(case substri
 
 update survey set came = null where coalesce(finished, begun, made) - came <= 86400000;
 
-update zone set judged = false
-where latest is not null and zone in (select zone from survey where came is not null);
+update zone set judged = false where zone in (select zone from survey where came is not null);
 
 drop index zone_latest;
 

@@ -19,8 +19,8 @@ final class OfficeOpening {
     static final String OFFICE = "office.json";
     private static final String LOCK = "store.lock";
     /** What an opening that was cut off may leave, and a key that packs were signed with. */
-    private static final Set<String> BEGUN =
-            Set.of(LOCK, OfficeStore.PACKS, OfficeStore.PASSING, FolderBooks.JOURNAL, FolderBooks.INDEX, DeviceKey.FILE);
+    private static final Set<String> BEGUN = Set.of(LOCK, OfficeStore.PACKS, OfficeStore.PASSING, FolderBooks.JOURNAL,
+            FolderBooks.INDEX, DeviceKey.FILE);
 
     private OfficeOpening() {
     }

@@ -379,7 +379,8 @@ public final class OfficeStore implements AutoCloseable {
         String name = OfficeName.proved(typed);
         desk.call(() -> {
             try {
-                device = new DeviceFile(folder, options.files(), OfficeOpening.OFFICE).write(Optional.of(device.id()), name);
+                device = new DeviceFile(folder, options.files(), OfficeOpening.OFFICE)
+                        .write(Optional.of(device.id()), name);
                 return true;
             } catch (IOException e) {
                 throw new Refused(Fault.defect("store", e, options.files(), folder), e);

@@ -180,7 +180,8 @@ public final class BedmarkApp extends Application {
         Workplace here = begun.workplace();
         begun.choice().over(stage);
         here.proveAfter(PROOF_DELAY);
-        Shell opened = new Shell(here, ready.orElseGet(() -> FirstScene.plain(Windows.WIDTH, Windows.HEIGHT)), begun.walked());
+        Shell opened = new Shell(here, ready.orElseGet(() -> FirstScene.plain(Windows.WIDTH, Windows.HEIGHT)),
+                begun.walked());
         workplace = Optional.of(here);
         shell = Optional.of(opened);
         Diary noted = new Diary(given.folder(), given.clock());

@@ -104,8 +104,8 @@ public record Wording(Words words, UnitSystem units, Map<Unit, Unit> liked) {
 
     /**
      * A defect in one sentence; a detail that is a code of its own is put in words ({@code code.detail}), and so is the
-     * system's kind of failure where that is all that is known ({@code reason.detail}). A newer program may have written
-     * one down that this one has no words for.
+     * system's kind of failure where that is all that is known ({@code reason.detail}). A newer program may have
+     * written one down that this one has no words for.
      */
     public String sentence(Defect defect) {
         if (!words.has("defect." + defect.code())) {

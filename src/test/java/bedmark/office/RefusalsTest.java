@@ -143,7 +143,8 @@ class RefusalsTest {
     @Test
     void whatCanNotBeNotedIsRefusedAllTheSameAndSaysSo() throws SQLException {
         try (OfficeStore store = Offices.trusting(folder.resolve("office"), folder.resolve("tablet"))) {
-            try (Connection tables = DriverManager.getConnection("jdbc:h2:file:" + folder.resolve("office/index/office"));
+            try (Connection tables = DriverManager.getConnection("jdbc:h2:file:"
+                    + folder.resolve("office/index/office"));
                     Statement statement = tables.createStatement()) {
                 statement.execute("drop table refusal");
             }

@@ -11,8 +11,8 @@ public final class RefusalTable {
     private static final String ORDER = " order by last_at desc, pack";
     private static final String INSERT = "insert into refusal (" + RefusalRow.COLUMNS
             + ") values (?, ?, ?, ?, ?, ?, ?, ?, ?)";
-    private static final String AGAIN = "update refusal set file = ?, device = ?, fingerprint = ?, why = ?, last_at = ? "
-            + "where pack = ?";
+    private static final String AGAIN = "update refusal set file = ?, device = ?, fingerprint = ?, why = ?, "
+            + "last_at = ? where pack = ?";
 
     private final Link link;
 

@@ -14,7 +14,6 @@ import javafx.stage.Stage;
 
 /** The window that opens when a person opens a pack, a round file or a receipt. */
 public final class ArrivalApp extends Application {
-
     /** What the launcher hands over; the toolkit makes the application itself and takes no arguments but texts. */
     private static Optional<Launch> launch = Optional.empty();
 

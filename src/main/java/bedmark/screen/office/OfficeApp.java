@@ -11,7 +11,6 @@ import javafx.stage.Stage;
 
 /** The window of the office. */
 public final class OfficeApp extends Application {
-
     /** What the launcher hands over; the toolkit makes the application itself and takes no arguments but texts. */
     private static Optional<Launch> launch = Optional.empty();
 

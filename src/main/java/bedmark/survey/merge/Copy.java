@@ -23,7 +23,8 @@ import java.util.stream.Stream;
  *                   more than {@link #SLACK}; nothing where its date can be believed
  */
 public record Copy(String digest, UUID id, int revision, Optional<UUID> supersedes, ZoneId zone, String round,
-                   InspectionStatus status, OptionalLong begun, OptionalLong finished, Origin origin, OptionalLong came) {
+                   InspectionStatus status, OptionalLong begun, OptionalLong finished, Origin origin,
+                   OptionalLong came) {
 
     /** The order in which visits were made, as far as the tablets' clocks tell; the digest where they don't. */
     public static final Comparator<Copy> IN_TIME = Comparator.comparingLong(Copy::moment)

@@ -277,12 +277,14 @@ class ZoneTrendTest {
                 depth(ZoneTrend.of(ZONE, falling, List.of(), List.of(), 0)).outlook());
         assertTrue(trend.line().slope() < 0);
         assertTrue(trend.overloaded().isEmpty());
-        assertEquals(Interval.Reason.NO_TREND, ZoneTrend.of(ZONE, falling, List.of(), List.of(), 0).interval().reason());
+        assertEquals(Interval.Reason.NO_TREND,
+                ZoneTrend.of(ZONE, falling, List.of(), List.of(), 0).interval().reason());
     }
 
     @Test
     void aReplacedSurveyIsShownAndNotCounted() {
-        ZoneTrend trend = ZoneTrend.of(ZONE, rising(5), List.of(survey(LocalDate.of(2025, 3, 2), 400, "")), List.of(), 0);
+        ZoneTrend trend = ZoneTrend.of(ZONE, rising(5), List.of(survey(LocalDate.of(2025, 3, 2), 400, "")), List.of(),
+                0);
         assertEquals(6, depth(trend).observations().size());
         Outlook.Trend outlook = assertInstanceOf(Outlook.Trend.class, depth(trend).outlook());
         assertEquals(10, outlook.test().s());

@@ -13,8 +13,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
+/** Units of the register as a person reads and types them. */
 class RegisterUnitsTest {
-
     private static Wording wording(Locale language) {
         return new Wording(new Words(language), UnitSystem.METRIC);
     }

@@ -73,11 +73,13 @@ public final class Refusals {
     }
 
     private void note(OfficeTables tables, List<Received.Turned> turned, List<String> in) {
-        tables.refusals().settle(in);
         if (turned.isEmpty()) {
+            tables.refusals().settle(in);
             return;
         }
+        // Before any row is touched: another desk that thins them would wait for this one, and this one for it.
         tables.alone();
+        tables.refusals().settle(in);
         long now = clock.millis();
         turned.stream().filter(one -> one.content().filter(content -> tables.hasPack(content.sha256())).isEmpty())
                 .forEach(one -> tables.refusals().note(row(one, now)));

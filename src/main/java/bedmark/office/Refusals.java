@@ -93,7 +93,8 @@ public final class Refusals {
                 turned.sender().flatMap(Sender::name), turned.fingerprint(), text(turned.why()), now, now);
     }
 
-    private static String key(Received.Turned turned) {
+    /** What a refused pack is told apart by: one that is refused again is the same one. */
+    public static String key(Received.Turned turned) {
         return turned.content().map(Received.Content::sha256).orElseGet(() -> unread(turned.file()));
     }
 

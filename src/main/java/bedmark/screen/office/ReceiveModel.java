@@ -18,9 +18,12 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.concurrent.Executors;
 import java.util.concurrent.ScheduledExecutorService;
 import java.util.concurrent.TimeUnit;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.collections.FXCollections;
@@ -86,6 +89,13 @@ public final class ReceiveModel {
     /** What was refused, whenever that was, and is not in; the last refused first. */
     public ReadOnlyObjectProperty<List<Refusal>> refusedProperty() {
         return refused.getReadOnlyProperty();
+    }
+
+    /** Those among them that nothing above tells of; what is told above has the same words. */
+    List<Refusal> refusedBefore() {
+        Set<String> told = received.stream().flatMap(one -> one instanceof Received.Turned turned
+                ? Stream.of(Refusals.key(turned)) : Stream.empty()).collect(Collectors.toSet());
+        return refused.get().stream().filter(one -> !told.contains(Refusals.key(one.turned()))).toList();
     }
 
     /** Looks up what is still refused. */

@@ -13,9 +13,6 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.Set;
-import java.util.stream.Collectors;
-import java.util.stream.Stream;
 import javafx.collections.ListChangeListener;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
@@ -115,13 +112,8 @@ final class ReceiveView extends VBox {
         }
     }
 
-    /** Those that are told of above stand there with the same words. */
     private List<Node> stillRefused() {
-        Set<Optional<Received.Content>> told = model.received().stream().flatMap(one ->
-                one instanceof Received.Turned turned ? Stream.of(turned.content()) : Stream.empty())
-                .filter(Optional::isPresent).collect(Collectors.toSet());
-        List<Refusal> refusals = model.refusedProperty().get().stream()
-                .filter(one -> !told.contains(one.turned().content())).toList();
+        List<Refusal> refusals = model.refusedBefore();
         List<Node> shown = new ArrayList<>();
         refusals.stream().limit(REFUSED_SHOWN).forEach(one ->
                 shown.add(new ReceivedRow(wording, one, model::trust, () -> model.putAway(one))));

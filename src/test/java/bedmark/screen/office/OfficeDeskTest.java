@@ -8,6 +8,8 @@ import bedmark.diary.Diary;
 import bedmark.document.Defect;
 import bedmark.office.Offices;
 import bedmark.office.Received;
+import bedmark.office.Refusal;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
@@ -121,6 +123,27 @@ class OfficeDeskTest {
             model.look();
             assertTrue(come(all));
             model.close();
+        }
+    }
+
+    @Test
+    void whatIsToldOfIsNotListedOnceMoreAsRefusedBefore() throws Exception {
+        Path broken = Files.write(folder.resolve("broken.zip"), new byte[] {1, 2, 3});
+        Path unread = Files.createSymbolicLink(folder.resolve("device.zip"), Path.of("/dev/null"));
+        try (OfficeDesk desk = desk(Runnable::run)) {
+            ReceiveModel model = new ReceiveModel(desk);
+            CompletableFuture<List<Refusal>> refused = new CompletableFuture<>();
+            model.refusedProperty().addListener((property, before, now) -> refused.complete(now));
+            model.receive(List.of(broken, unread));
+            assertEquals(2, come(refused).size());
+            assertEquals(List.of(), model.refusedBefore());
+            model.close();
+            ReceiveModel next = new ReceiveModel(desk);
+            CompletableFuture<List<Refusal>> held = new CompletableFuture<>();
+            next.refusedProperty().addListener((property, before, now) -> held.complete(now));
+            next.lookAtRefused();
+            assertEquals(come(held), next.refusedBefore());
+            next.close();
         }
     }
 }

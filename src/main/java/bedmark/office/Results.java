@@ -56,8 +56,8 @@ final class Results {
         List<JudgedZone> replaced = judged(tables, copies.stream().filter(copy -> copy.result() && !copy.datedAhead()
                 && results.stream().noneMatch(one -> one.digest().equals(copy.digest()))).toList(),
                 copy -> copy.origin().register());
-        return ZoneTrend.of(zone, oneSide(counted.get(false), merged.clashes()), replaced, counted.get(true),
-                merged.clashes().size());
+        return ZoneTrend.of(zone, oneSide(counted.get(false), merged.clashes()), replaced,
+                oneSide(counted.get(true), merged.clashes()), merged.clashes().size());
     }
 
     private static List<JudgedZone> oneSide(List<JudgedZone> judged, List<Clash> clashes) {

@@ -32,7 +32,8 @@ public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, 
      *
      * @param counted  the results that count, in time order; of one survey no more than one
      * @param replaced results in whose place others stand
-     * @param undated  the results that were dated ahead
+     * @param undated  the results that were dated ahead, as their tablets have them in order; of one survey no more
+     *                 than one
      * @param clashes  conflicts that wait for a person
      */
     public static ZoneTrend of(ZoneId zone, List<JudgedZone> counted, List<JudgedZone> replaced,
@@ -52,8 +53,9 @@ public record ZoneTrend(ZoneId zone, List<Series> series, List<Change> changes, 
             }
         }
         Optional<JudgedZone> last = counted.stream().reduce((one, other) -> other);
-        Optional<Level> latest = Stream.concat(last.stream(), undated.stream().filter(one ->
-                last.map(dated -> one.copy().mayFollow(dated.copy())).orElse(true)))
+        Optional<JudgedZone> doubted = undated.stream().filter(one ->
+                last.map(dated -> one.copy().mayFollow(dated.copy())).orElse(true)).reduce((one, other) -> other);
+        Optional<Level> latest = Stream.concat(last.stream(), doubted.stream())
                 .map(one -> one.assessment().worstLevel()).reduce(Level::or);
         Interval interval = Interval.of(series.stream().filter(one -> one.measure() == Measure.DEPTH).findFirst(),
                 latest);

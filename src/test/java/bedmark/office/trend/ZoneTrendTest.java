@@ -56,6 +56,11 @@ class ZoneTrendTest {
         return new JudgedZone(ZONE, copy, survey, REGISTER, new Assessor(REGISTER).assess(survey, List.of()));
     }
 
+    private static JudgedZone datedAhead(JudgedZone zone, LocalDate came) {
+        return new JudgedZone(ZONE, zone.copy().receivedAt(came.atStartOfDay(ZoneOffset.UTC).toInstant()
+                .toEpochMilli()), zone.survey(), REGISTER, zone.assessment());
+    }
+
     private static List<JudgedZone> rising(int surveys) {
         List<JudgedZone> zones = new ArrayList<>();
         for (int i = 0; i < surveys; i++) {
@@ -279,6 +284,18 @@ class ZoneTrendTest {
         assertTrue(trend.overloaded().isEmpty());
         assertEquals(Interval.Reason.NO_TREND,
                 ZoneTrend.of(ZONE, falling, List.of(), List.of(), 0).interval().reason());
+    }
+
+    @Test
+    void aZoneIsLookedAtAsOftenAsTheLastSurveyDatedAheadAsksFor() {
+        JudgedZone heaped = datedAhead(survey(LocalDate.of(2035, 1, 1), 400, ""), LocalDate.of(2025, 3, 1));
+        JudgedZone dug = datedAhead(survey(LocalDate.of(2036, 1, 1), 60, ""), LocalDate.of(2025, 4, 1));
+        List<JudgedZone> believed = List.of(survey(LocalDate.of(2025, 1, 1), 60, ""));
+        assertEquals(Interval.Reason.OVERLOADED,
+                ZoneTrend.of(ZONE, believed, List.of(), List.of(heaped), 0).interval().reason());
+        ZoneTrend mended = ZoneTrend.of(ZONE, believed, List.of(), List.of(heaped, dug), 0);
+        assertEquals(Interval.Reason.TOO_FEW, mended.interval().reason(), "as the list has it");
+        assertEquals(2, mended.undated());
     }
 
     @Test

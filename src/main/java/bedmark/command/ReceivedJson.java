@@ -39,8 +39,9 @@ final class ReceivedJson {
     }
 
     private static Branch in(String outcome, Path file, String sha256, String tablet, String fingerprint) {
-        return Branch.EMPTY.with("outcome", outcome).with("file", file.toString()).with("sha256", sha256)
-                .with("tablet", tablet).with("fingerprint", fingerprint);
+        Branch branch = Branch.EMPTY.with("outcome", outcome).with("file", file.toString()).with("sha256", sha256);
+        // A tablet without a name goes by its fingerprint.
+        return (tablet.equals(fingerprint) ? branch : branch.with("tablet", tablet)).with("fingerprint", fingerprint);
     }
 
     private static Node document(Clash clash) {

@@ -9,7 +9,11 @@ import bedmark.command.Terminal.Result;
 import bedmark.document.Branch;
 import bedmark.json.JsonReader;
 import bedmark.office.Offices;
+import bedmark.office.Received;
+import bedmark.quantity.UnitSystem;
 import bedmark.survey.Bundle;
+import bedmark.wording.Wording;
+import bedmark.words.Words;
 import java.io.IOException;
 import java.math.BigDecimal;
 import java.net.StandardProtocolFamily;
@@ -21,6 +25,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -120,6 +125,14 @@ class OfficeCommandsTest {
         assertEquals("No refused pack waits.", office("refused", "--put-away", damaged.toString()).out().strip());
         assertEquals(3, office("receive", damaged.toString()).code());
         assertEquals("", office("refused", "--json", "--put-away", left.text("sha256").orElseThrow()).out());
+    }
+
+    @Test
+    void aTabletWithoutANameIsNotToldByItsFingerprintTwice() {
+        ReceivedJson lines = new ReceivedJson(new Wording(new Words(Locale.ENGLISH), UnitSystem.METRIC));
+        assertEquals("{\"outcome\":\"known\",\"file\":\"a.zip\",\"sha256\":\"ab12\",\"fingerprint\":\"F1\"}",
+                lines.line(new Received.AlreadyHere(Path.of("a.zip"), "ab12", "F1", "F1", Optional.empty()),
+                        Optional.empty()));
     }
 
     @Test

@@ -47,9 +47,7 @@ final class PackMakeCommand implements Callable<Integer> {
             NamedPath.requireFolder(out.toAbsolutePath().normalize().getParent());
         }
         Path keys = store.orElseGet(OpenCommand::ownStore);
-        if (Files.exists(keys)) {
-            NamedPath.requireFolder(keys);
-        }
+        NamedPath.requireFolderOrNothing(keys);
         DeviceKey key = DeviceKey.of(keys);
         WrittenPack written;
         try (ProgressLine progress = new ProgressLine(surroundings)) {

@@ -6,7 +6,6 @@ import bedmark.index.StoreOptions;
 import bedmark.journal.NamedPath;
 import bedmark.survey.LevelWord;
 import bedmark.vault.Passphrase;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -45,9 +44,7 @@ final class StoreRestoreCommand implements Callable<Integer> {
     public Integer call() {
         NamedPath.requireFolder(backup);
         InputFile.requireNoOffice(folder, "restore");
-        if (Files.exists(folder)) {
-            NamedPath.requireFolder(folder);
-        }
+        NamedPath.requireFolderOrNothing(folder);
         StoreOptions options = StoreOptions.of("tablet").withClock(surroundings.clock())
                 .withLevels(new LevelWord()::of);
         boolean sealed = new StoreFolder(folder, options).sealed();

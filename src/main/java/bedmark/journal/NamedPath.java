@@ -54,6 +54,17 @@ public final class NamedPath {
     }
 
     /**
+     * Refuses what stands where a folder is to be made; one that is there already must be readable.
+     *
+     * @throws Refused {@code folder-is-file}, {@code folder-unreadable}
+     */
+    public static void requireFolderOrNothing(Path folder) {
+        if (Files.exists(folder)) {
+            requireFolder(folder);
+        }
+    }
+
+    /**
      * Refuses what no file can take the place of: an empty folder would give way to it, and so would a device, for
      * every program of the machine.
      *

@@ -61,9 +61,7 @@ public final class OfficeExport {
      */
     public long write(Path out, Progress progress) {
         try {
-            if (Files.exists(out)) {
-                NamedPath.requireFolder(out);
-            }
+            NamedPath.requireFolderOrNothing(out);
             Files.createDirectories(out);
             try (Stream<Path> held = Files.list(out)) {
                 if (held.findAny().isPresent()) {

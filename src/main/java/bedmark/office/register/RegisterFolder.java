@@ -23,15 +23,14 @@ public final class RegisterFolder {
      * @param head as {@link RegisterTables#of} takes it
      * @param out  the folder; made where it is not there
      * @return how many tables
-     * @throws Refused {@code folder-is-file}, {@code export-not-saved}; tables that were there are as they were
+     * @throws Refused {@code folder-is-file}, {@code folder-unreadable}, {@code file-is-folder}, {@code file-not-plain},
+     *                 {@code export-not-saved}; tables that were there are as they were
      */
     public static int write(Branch head, Path out) {
         Map<String, String> tables = RegisterTables.of(head);
         Map<Path, Path> parts = new LinkedHashMap<>();
         try {
-            if (Files.exists(out)) {
-                NamedPath.requireFolder(out);
-            }
+            NamedPath.requireFolderOrNothing(out);
             Files.createDirectories(out);
             for (Map.Entry<String, String> table : tables.entrySet()) {
                 Path target = out.resolve(table.getKey());

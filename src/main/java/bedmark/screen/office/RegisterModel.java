@@ -57,7 +57,11 @@ public final class RegisterModel {
         list.addListener((property, before, now) -> lookElsewhere());
         importing.draftProperty().addListener((property, before, now) -> workOn());
         desk.changesProperty().addListener((property, before, now) -> refresh());
-        desk.preferencesProperty().addListener((property, before, now) -> grid.get().ifPresent(shown -> show()));
+        desk.preferencesProperty().addListener((property, before, now) -> {
+            if (!before.locale().equals(now.locale())) {
+                grid.get().ifPresent(shown -> show());
+            }
+        });
         refresh();
     }
 

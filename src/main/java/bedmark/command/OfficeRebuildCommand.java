@@ -28,8 +28,7 @@ final class OfficeRebuildCommand implements Callable<Integer> {
                 OfficeOptions.of(surroundings.clock()).withProgress(progress::at))) {
             store.found().forEach(defect -> surroundings.err().println("bedmark: "
                     + surroundings.wording().sentence(defect)));
-            surroundings.say("command.office.rebuilt", store.packs().size(),
-                    folder);
+            surroundings.say("command.office.rebuilt", store.packs().size(), folder);
             return store.found().isEmpty() ? ExitCode.FINE : ExitCode.UNREADABLE;
         }
     }

@@ -51,7 +51,7 @@ final class OfficeRefusedCommand implements Callable<Integer> {
         RefusalText text = new RefusalText(surroundings.wording());
         refusals.forEach(one -> surroundings.out().println(json ? text.json(one) : text.line(one)));
         if (refusals.isEmpty() && !json) {
-            surroundings.out().println(surroundings.words().text("office.refused.none"));
+            surroundings.say("office.refused.none");
         }
         return ExitCode.FINE;
     }

@@ -45,8 +45,7 @@ final class OfficeRoundCommand implements Callable<Integer> {
                     .orElseThrow(() -> new Refused(RegisterDesk.unclear(known)));
             new RoundDesk(store).send(id, rounds, out, OffsetDateTime.now(surroundings.clock()), desk.person());
             progress.done();
-            surroundings.say("office.round.written", out,
-                    store.key().fingerprint());
+            surroundings.say("office.round.written", out, store.key().fingerprint());
         }
         return ExitCode.FINE;
     }

@@ -5,6 +5,7 @@ import bedmark.document.Node;
 import bedmark.json.JsonWriter;
 import bedmark.office.Received;
 import bedmark.office.Refusal;
+import bedmark.office.Sender;
 import bedmark.wording.Wording;
 import java.nio.charset.StandardCharsets;
 import java.util.Optional;
@@ -53,7 +54,7 @@ final class RefusalText {
         }
         branch = with(branch, "sender", turned.sender().map(sender -> sender.fingerprint().isEmpty() ? "unproved"
                 : sender.trusted() ? "trusted" : "untrusted"));
-        branch = with(branch, "tablet", turned.sender().flatMap(sender -> sender.name()));
+        branch = with(branch, "tablet", turned.sender().flatMap(Sender::name));
         return with(branch, "fingerprint", turned.fingerprint()).with("code", turned.why().code())
                 .with("reason", wording.sentence(turned.why()));
     }

@@ -41,8 +41,7 @@ final class StoreCheckCommand implements Callable<Integer> {
         try (ProgressLine progress = new ProgressLine(surroundings)) {
             check = Store.check(folder, FileLayer.disk(), passphrase.of(folder, surroundings), progress::at);
         }
-        surroundings.say("command.store.counts", check.segments(),
-                check.entries(), check.photos());
+        surroundings.say("command.store.counts", check.segments(), check.entries(), check.photos());
         tell(check.facts());
         check.torn().forEach(file ->
                 surroundings.say("command.store.torn", file));

@@ -8,7 +8,6 @@ import bedmark.pack.Fingerprint;
 import bedmark.pack.ReceiptReader;
 import bedmark.pack.SignedReceipt;
 import bedmark.survey.LevelWord;
-import bedmark.wording.Wording;
 import java.nio.file.Path;
 import java.util.HashSet;
 import java.util.List;
@@ -69,8 +68,8 @@ final class StoreReceiptCommand implements Callable<Integer> {
                     book.requireTrusted(signed, vouched);
                     return book.note(signed, "");
                 });
-                surroundings.say("queue.receipt", Wording.plain(
-                        OfficeNameCommand.named(surroundings, outcome.receipt().office().name())),
+                surroundings.say("queue.receipt",
+                        OfficeNameCommand.named(surroundings, outcome.receipt().office().name()),
                         outcome.received().size(), outcome.known().size());
                 if (!outcome.differing().isEmpty()) {
                     surroundings.err().println("bedmark: " + surroundings.words().text("queue.receipt-differs",

@@ -236,7 +236,6 @@ public final class SettingsView extends SidedScreen {
                 ((Label) label).setText(path.orElse(wording.text("settings.no-folder"))));
     }
 
-
     /** The limits: each rule with where it begins to warn and where it says overloaded, and who set it. */
     private void limits() {
         VBox list = new VBox();

@@ -333,11 +333,6 @@ public final class OfficeTables implements AutoCloseable {
         return digests;
     }
 
-    /** How many contents of surveys there are. */
-    public long countCopies() {
-        return link.rows("select count(*) from survey", row -> row.getLong(1)).get(0);
-    }
-
     @Override
     public void close() {
         link.close();

@@ -40,8 +40,11 @@ public final class Refusals {
     /** Those that are not in yet, the last refused at the head. */
     public List<Refusal> open() {
         long since = clock.millis() - KEPT.toMillis();
-        return store.ask(tables -> tables.refusals().all().stream().filter(row -> row.last() >= since)
-                .map(row -> read(row, store.minutes(tables)::trusts)).toList());
+        return store.ask(tables -> {
+            Minutes known = store.minutes(tables);
+            return tables.refusals().all().stream().filter(row -> row.last() >= since)
+                    .map(row -> read(row, known::trusts)).toList();
+        });
     }
 
     /** Nobody waits for it any more; refused once more, it is here again. */

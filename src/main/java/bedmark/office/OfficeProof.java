@@ -92,7 +92,7 @@ public record OfficeProof(int packs, int rows, List<Defect> defects) {
                 sha.update(chunk, 0, count);
             }
         } catch (IOException e) {
-            defects.add(Defect.in(file.toString(), "pack-unreadable", "read"));
+            defects.add(Defect.in(file.toString(), "pack-unreadable", Fault.reason(e)));
             return;
         }
         if (!Digest.ofBytes(sha.digest()).hex().equals(pack.sha256())) {

@@ -2,6 +2,7 @@ package bedmark.office;
 
 import bedmark.document.Defect;
 import bedmark.document.Refused;
+import bedmark.journal.Fault;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.pack.PackLimits;
@@ -49,7 +50,7 @@ final class PackPhotos {
             read.copy(found.get(), bytes);
             return Optional.of(bytes.toByteArray());
         } catch (IOException e) {
-            throw new Refused(Defect.in(shelf.file(pack).toString(), "pack-unreadable", "read"), e);
+            throw new Refused(Defect.in(shelf.file(pack).toString(), "pack-unreadable", Fault.reason(e)), e);
         }
     }
 }

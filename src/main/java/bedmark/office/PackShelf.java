@@ -87,7 +87,7 @@ final class PackShelf {
         try {
             return new FileInputStream(source.toFile());
         } catch (IOException e) {
-            throw new Refused(Defect.in(source.toString(), "pack-unreadable", "read"), e);
+            throw new Refused(Defect.in(source.toString(), "pack-unreadable", Fault.reason(e)), e);
         }
     }
 
@@ -95,7 +95,7 @@ final class PackShelf {
         try {
             return input.readNBytes(chunk, 0, chunk.length);
         } catch (IOException e) {
-            throw new Refused(Defect.in(source.toString(), "pack-unreadable", "read"), e);
+            throw new Refused(Defect.in(source.toString(), "pack-unreadable", Fault.reason(e)), e);
         }
     }
 

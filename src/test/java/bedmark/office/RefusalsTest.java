@@ -3,12 +3,15 @@ package bedmark.office;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
+import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import bedmark.index.office.OfficeTables;
 import bedmark.index.office.RefusalRow;
 import bedmark.index.office.RefusalTable;
 import bedmark.journal.Digest;
+import bedmark.journal.Fault;
 import bedmark.journal.Progress;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -137,6 +140,19 @@ class RefusalsTest {
             Files.copy(pack, unread);
             assertInstanceOf(Received.Taken.class, store.receive(unread, "Ida Marsh"));
             assertEquals(List.of(), refusals(store, Offices.NOW));
+        }
+    }
+
+    @Test
+    void aFileThatFailsWhileItIsReadIsRefusedWithTheSystemsOwnReason() {
+        // A file of the system that can be opened and not read, as a stick is that was pulled out.
+        Path failing = Path.of("/proc/self/mem");
+        assumeTrue(Files.isReadable(failing));
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), folder.resolve("tablet"))) {
+            Received.Turned turned = refused(store, failing);
+            assertEquals("pack-unreadable", turned.why().code());
+            IOException failure = assertThrows(IOException.class, () -> Files.readAllBytes(failing));
+            assertEquals(List.of(Fault.reason(failure)), turned.why().details());
         }
     }
 

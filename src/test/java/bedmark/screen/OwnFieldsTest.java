@@ -80,7 +80,8 @@ class OwnFieldsTest {
         app.click(slot("scraperTag"));
         app.type("SC-4 left");
         app.press(KeyCode.ENTER);
-        assertTrue(box("airCannons").activeProperty().get(), "Enter leads to the next field of the form");
+        // Enter leads to the next field of the form.
+        app.until(() -> box("airCannons").activeProperty().get());
         app.type("3");
         app.press(KeyCode.ENTER);
         assertEquals("Shut", ((Labeled) app.node("choice-shut")).getText());

@@ -4,11 +4,9 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import bedmark.journal.Digest;
 import bedmark.journal.Progress;
 import bedmark.survey.merge.Copy;
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Instant;
@@ -18,7 +16,6 @@ import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 import java.util.Random;
-import java.util.TreeMap;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -53,7 +50,7 @@ class AnyOrderTest {
                 }
                 assertInstanceOf(Received.AlreadyHere.class, store.receive(packs.get(order % packs.size()), "Ida Marsh"));
                 new OfficeExport(store).write(export, Progress.NONE);
-                Map<String, String> files = files(export);
+                Map<String, String> files = Offices.files(export);
                 if (order == 0) {
                     first = files;
                     ranked = Offices.told(store);
@@ -72,15 +69,5 @@ class AnyOrderTest {
                 assertEquals(ranked, Offices.told(store));
             }
         }
-    }
-
-    private static Map<String, String> files(Path folder) throws IOException {
-        Map<String, String> digests = new TreeMap<>();
-        try (Stream<Path> files = Files.walk(folder)) {
-            for (Path file : files.filter(Files::isRegularFile).toList()) {
-                digests.put(folder.relativize(file).toString(), Digest.of(Files.readAllBytes(file)).hex());
-            }
-        }
-        return digests;
     }
 }

@@ -10,7 +10,6 @@ import bedmark.document.Branch;
 import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.engine.verdict.Level;
-import bedmark.journal.Digest;
 import bedmark.journal.Progress;
 import bedmark.office.trend.Interval;
 import bedmark.office.trend.Outlook;
@@ -234,16 +233,9 @@ class OfficeStoreTest {
 
     /** The truth: every file but those of the index, which is a database that may write as it likes. */
     private static Map<String, String> files(Path office) throws IOException {
-        try (Stream<Path> files = Files.walk(office)) {
-            Map<String, String> digests = new TreeMap<>();
-            for (Path file : files.filter(Files::isRegularFile).toList()) {
-                String name = office.relativize(file).toString();
-                if (!name.startsWith("index")) {
-                    digests.put(name, Digest.of(Files.readAllBytes(file)).hex());
-                }
-            }
-            return digests;
-        }
+        Map<String, String> digests = Offices.files(office);
+        digests.keySet().removeIf(name -> name.startsWith("index"));
+        return digests;
     }
 
     /** A database server would take neither, and say so in words of its own; the folder's tables would take both. */

@@ -2,6 +2,7 @@ package bedmark.office;
 
 import bedmark.document.Branch;
 import bedmark.document.Node;
+import bedmark.journal.Digest;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
 import bedmark.json.Canonical;
@@ -19,7 +20,10 @@ import java.time.Instant;
 import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
 import java.util.UUID;
+import java.util.stream.Stream;
 
 /** Packs and office stores for tests. */
 public final class Offices {
@@ -69,6 +73,17 @@ public final class Offices {
     public static Bundle with(Bundle bundle, String id, String createdAt, List<Branch> surveys) {
         return new Bundle(bundle.document().with("id", UUID.nameUUIDFromBytes(id.getBytes(StandardCharsets.UTF_8)).toString())
                 .with("createdAt", createdAt).with("surveys", new Node.Series(new ArrayList<>(surveys))));
+    }
+
+    /** The digests of all files under a folder, by their places in it: two exports are told apart by them. */
+    static Map<String, String> files(Path folder) throws IOException {
+        Map<String, String> digests = new TreeMap<>();
+        try (Stream<Path> files = Files.walk(folder)) {
+            for (Path file : files.filter(Files::isRegularFile).toList()) {
+                digests.put(folder.relativize(file).toString(), Digest.of(Files.readAllBytes(file)).hex());
+            }
+        }
+        return digests;
     }
 
     /** Everything that a store says, for comparing two of them. */

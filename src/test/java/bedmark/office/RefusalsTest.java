@@ -10,7 +10,6 @@ import static org.junit.jupiter.api.Assumptions.assumeTrue;
 import bedmark.index.office.OfficeTables;
 import bedmark.index.office.RefusalRow;
 import bedmark.index.office.RefusalTable;
-import bedmark.journal.Digest;
 import bedmark.journal.Fault;
 import bedmark.journal.Progress;
 import java.io.IOException;
@@ -24,11 +23,8 @@ import java.time.Clock;
 import java.time.Duration;
 import java.time.OffsetDateTime;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
-import java.util.TreeMap;
-import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -99,19 +95,9 @@ class RefusalsTest {
             other.receive(pack, "Ida Marsh");
             new OfficeExport(store).write(folder.resolve("export"), Progress.NONE);
             new OfficeExport(other).write(folder.resolve("export-other"), Progress.NONE);
-            assertEquals(files(folder.resolve("export-other")), files(folder.resolve("export")));
+            assertEquals(Offices.files(folder.resolve("export-other")), Offices.files(folder.resolve("export")));
             assertEquals(other.ask(OfficeTables::rowDigests).keySet(), store.ask(OfficeTables::rowDigests).keySet());
         }
-    }
-
-    private static Map<String, String> files(Path folder) throws IOException {
-        Map<String, String> digests = new TreeMap<>();
-        try (Stream<Path> files = Files.walk(folder)) {
-            for (Path file : files.filter(Files::isRegularFile).toList()) {
-                digests.put(folder.relativize(file).toString(), Digest.of(Files.readAllBytes(file)).hex());
-            }
-        }
-        return digests;
     }
 
     @Test

@@ -33,14 +33,12 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
 import java.util.Set;
-import java.util.TreeMap;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.CyclicBarrier;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.concurrent.TimeUnit;
-import java.util.stream.Stream;
 import java.util.zip.ZipEntry;
 import java.util.zip.ZipFile;
 import org.junit.jupiter.api.AfterAll;
@@ -114,7 +112,7 @@ class SharedOfficeTest {
             assertEquals(Offices.told(alone), Offices.told(shared));
             new OfficeExport(alone).write(folder.resolve("export-alone"), Progress.NONE);
             new OfficeExport(shared).write(folder.resolve("export-shared"), Progress.NONE);
-            assertEquals(files(folder.resolve("export-alone")), files(folder.resolve("export-shared")));
+            assertEquals(Offices.files(folder.resolve("export-alone")), Offices.files(folder.resolve("export-shared")));
             assertEquals(report(alone, folder.resolve("report-alone")), report(shared, folder.resolve("report-shared")));
             desksThatChangeOneRegisterDoNotReplaceEachOther(shared);
             whatOneDeskRefusedAnotherSees(shared);
@@ -188,7 +186,7 @@ class SharedOfficeTest {
         for (ReportFile.Kind kind : ReportFile.Kind.values()) {
             ReportFile.write(into.resolve("report" + kind.ending()), kind, content, options);
         }
-        Map<String, String> digests = files(into);
+        Map<String, String> digests = Offices.files(into);
         assertEquals(Set.of("report.pdf", "report.xlsx", "report.csv"), digests.keySet());
         digests.remove("report.xlsx");
         try (ZipFile workbook = new ZipFile(into.resolve("report.xlsx").toFile())) {
@@ -197,16 +195,6 @@ class SharedOfficeTest {
             }
         }
         assertNotNull(digests.remove("docProps/core.xml"));
-        return digests;
-    }
-
-    private static Map<String, String> files(Path folder) throws IOException {
-        Map<String, String> digests = new TreeMap<>();
-        try (Stream<Path> files = Files.walk(folder)) {
-            for (Path file : files.filter(Files::isRegularFile).toList()) {
-                digests.put(folder.relativize(file).toString(), Digest.of(Files.readAllBytes(file)).hex());
-            }
-        }
         return digests;
     }
 }

@@ -98,6 +98,8 @@ public final class Glass {
         stage.setX(0);
         stage.setY(0);
         stage.show();
+        // A popup that an earlier window closed under may still have the platform's keys.
+        stage.requestFocus();
     }
 
     /** A dressed and laid out scene on a stage. */

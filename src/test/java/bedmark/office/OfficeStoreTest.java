@@ -1,6 +1,7 @@
 package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
@@ -128,6 +129,7 @@ class OfficeStoreTest {
             assertEquals(hidden.survey(), store.judgedToday(HEALTHY).map(one -> one.copy().digest()));
             ZoneTrend trend = store.trend(HEALTHY);
             assertEquals(1, trend.undated());
+            assertFalse(trend.series().isEmpty());
             assertTrue(trend.series().stream().allMatch(series -> series.observations().size() == 1));
             RankedZone mended = received(store, bundle, healthy, "2026-10-01", HEALTHY);
             assertEquals(Place.WITHIN, mended.place());

@@ -24,7 +24,8 @@ public final class RegisterFolder {
      * @param out  the folder; made where it is not there
      * @return how many tables
      * @throws Refused {@code folder-is-file}, {@code folder-unreadable}, {@code file-is-folder}, {@code file-not-plain},
-     *                 {@code export-not-saved}; tables that were there are as they were
+     *                 {@code export-not-saved}; tables that were there are as they were, unless one could not take its place
+     *                 after others had
      */
     public static int write(Branch head, Path out) {
         Map<String, String> tables = RegisterTables.of(head);

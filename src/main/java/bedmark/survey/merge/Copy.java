@@ -30,7 +30,10 @@ public record Copy(String digest, UUID id, int revision, Optional<UUID> supersed
     public static final Comparator<Copy> IN_TIME = Comparator.comparingLong(Copy::moment)
             .thenComparingInt(Copy::revision).thenComparing(Copy::digest);
 
-    /** A clock may be ahead of the office's by so much: that of a tablet in another zone of time, or set by hand. */
+    /**
+     * A clock may be ahead of the office's by so much: that of a tablet in another zone of time, or set by hand. Common
+     * practice, no source.
+     */
     public static final Duration SLACK = Duration.ofDays(1);
 
     public Copy {

@@ -18,7 +18,7 @@ import java.util.function.Function;
 final class Provers implements AutoCloseable {
     /** So many whatever they hold, and more where they are small. */
     private static final int AHEAD = 3;
-    private static final int SMALL_AHEAD = 24;
+    private static final int SMALL_AHEAD = 32;
     private static final long SMALL_BYTES = 64 << 20;
 
     private final ExecutorService threads;
@@ -32,8 +32,8 @@ final class Provers implements AutoCloseable {
     Provers(List<Path> files, Function<Path, Proved> proving) {
         this.files = files.iterator();
         this.proving = proving;
-        // One more than there are processors: now and then one waits for the medium.
-        int many = Math.min(Runtime.getRuntime().availableProcessors() + 1, AHEAD);
+        // Taking in costs about as much as proving: whoever takes in shall not wait for a processor.
+        int many = Math.min(Runtime.getRuntime().availableProcessors(), AHEAD);
         this.threads = Executors.newFixedThreadPool(many, work -> {
             Thread thread = new Thread(work, "office-prover");
             thread.setDaemon(true);

@@ -37,11 +37,11 @@ import java.util.stream.Collectors;
 /** Takes packs in: copied beside the others, proved there, and only then told to the books; receipts of what is in. */
 final class Receiving {
     /** Packs that are brought onto the medium and into the tables together. */
-    private static final int TOGETHER = 16;
+    private static final int TOGETHER = 25;
     private static final long TOGETHER_BYTES = 16 << 20;
     /** Towards the end fewer go together, so that there is little left to take in when the last one is proved. */
     private static final int LAST_TOGETHER = 4;
-    private static final int SHARE_OF_REST = 3;
+    private static final int SHARE_OF_REST = 2;
 
     private final OfficeStore store;
     private final PackShelf shelf;

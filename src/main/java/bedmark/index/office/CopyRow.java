@@ -7,6 +7,8 @@ import bedmark.survey.merge.Origin;
 import bedmark.survey.merge.ZoneId;
 import java.sql.ResultSet;
 import java.sql.SQLException;
+import java.util.HashMap;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.UUID;
@@ -41,9 +43,15 @@ public record CopyRow(Copy copy, String pack, byte[] content) {
         return Pointer.of(copy.zone().plant(), copy.round(), copy.origin().conveyor()).toString();
     }
 
-    static Copy read(ResultSet row) throws SQLException {
+    /** Reads rows, of which many are about the same zones. */
+    static Link.RowReader<Copy> reader() {
+        Map<String, ZoneId> zones = new HashMap<>();
+        return row -> read(row, zones.computeIfAbsent(row.getString(5), ZoneId::ofKey));
+    }
+
+    private static Copy read(ResultSet row, ZoneId zone) throws SQLException {
         return new Copy(row.getString(1), row.getObject(2, UUID.class), row.getInt(3),
-                Optional.ofNullable(row.getObject(4, UUID.class)), ZoneId.ofKey(row.getString(5)),
+                Optional.ofNullable(row.getObject(4, UUID.class)), zone,
                 row.getString(6), InspectionStatus.valueOf(row.getString(7)), number(row, 8),
                 number(row, 9), new Origin(row.getLong(10), row.getString(11), row.getString(12)),
                 number(row, 13));

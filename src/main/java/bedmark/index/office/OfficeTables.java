@@ -181,7 +181,7 @@ public final class OfficeTables implements AutoCloseable {
         Map<String, CopyRow> fresh = new LinkedHashMap<>();
         rows.forEach(row -> fresh.putIfAbsent(row.copy().digest(), row));
         Map<String, Copy> known = new HashMap<>();
-        link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on digest = wanted", CopyRow::read,
+        link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on digest = wanted", CopyRow.reader(),
                 link.texts(fresh.keySet())).forEach(copy -> known.put(copy.digest(), copy));
         Set<String> touched = new HashSet<>();
         for (CopyRow row : rows) {
@@ -209,26 +209,26 @@ public final class OfficeTables implements AutoCloseable {
 
     /** Everything that came about some zones. */
     public List<Copy> copies(Collection<ZoneId> zones) {
-        return link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on zone = wanted", CopyRow::read,
+        return link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on zone = wanted", CopyRow.reader(),
                 link.texts(zones.stream().map(ZoneId::key).toList()));
     }
 
     /** Everything that came, by digest. */
     public List<Copy> copies() {
         return link.rows("select " + CopyRow.COLUMNS + " from survey order by zone, id, revision, digest",
-                CopyRow::read);
+                CopyRow.reader());
     }
 
     /** What loaded the same drives as some contents. */
     public List<Copy> companions(Collection<Copy> copies) {
-        return link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on drive = wanted", CopyRow::read,
+        return link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on drive = wanted", CopyRow.reader(),
                 link.texts(copies.stream().map(CopyRow::drive).distinct().toList()));
     }
 
     /** The contents with those digests. */
     public Map<String, Copy> copiesOf(Collection<String> digests) {
         Map<String, Copy> copies = new HashMap<>();
-        link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on digest = wanted", CopyRow::read,
+        link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on digest = wanted", CopyRow.reader(),
                 link.texts(digests)).forEach(copy -> copies.put(copy.digest(), copy));
         return copies;
     }

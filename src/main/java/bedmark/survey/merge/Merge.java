@@ -55,7 +55,10 @@ public final class Merge {
      * @param setAside digests of contents that a person decided against
      */
     public static MergedZone zone(ZoneId zone, Collection<Copy> copies, Set<String> setAside) {
-        List<Copy> held = of(copies).values().stream().filter(copy -> copy.zone().equals(zone)).toList();
+        Map<String, Copy> byDigest = new HashMap<>();
+        copies.stream().filter(copy -> copy.zone().equals(zone))
+                .forEach(copy -> byDigest.merge(copy.digest(), copy, Copy::or));
+        Collection<Copy> held = byDigest.values();
         Map<UUID, Integer> newest = new HashMap<>();
         held.forEach(copy -> newest.merge(copy.id(), copy.revision(), Math::max));
         Set<UUID> superseded = superseded(held, newest, setAside);
@@ -66,7 +69,7 @@ public final class Merge {
     }
 
     /** A correction that a person set aside corrects nothing. */
-    private static Set<UUID> superseded(List<Copy> held, Map<UUID, Integer> newest, Set<String> setAside) {
+    private static Set<UUID> superseded(Collection<Copy> held, Map<UUID, Integer> newest, Set<String> setAside) {
         Set<UUID> superseded = new HashSet<>();
         for (Copy copy : held) {
             if (!setAside.contains(copy.digest())) {
@@ -78,7 +81,7 @@ public final class Merge {
         return superseded;
     }
 
-    private static List<Clash> clashes(List<Copy> visits, List<Copy> held) {
+    private static List<Clash> clashes(List<Copy> visits, Collection<Copy> held) {
         Set<UUID> ids = new HashSet<>();
         if (visits.stream().allMatch(copy -> ids.add(copy.id()) && copy.supersedes().isEmpty())) {
             // Each is a survey of its own, as nearly all are.
@@ -88,7 +91,7 @@ public final class Merge {
         Map<UUID, List<Copy>> revisions = new TreeMap<>();
         Map<UUID, List<Copy>> corrections = new TreeMap<>();
         Map<UUID, Copy> byId = new HashMap<>();
-        held.forEach(copy -> byId.put(copy.id(), copy));
+        of(held).values().forEach(copy -> byId.put(copy.id(), copy));
         for (Copy copy : visits) {
             revisions.computeIfAbsent(copy.id(), key -> new ArrayList<>()).add(copy);
             corrections.computeIfAbsent(first(copy, byId), key -> new ArrayList<>()).add(copy);

@@ -18,6 +18,8 @@ import java.util.function.Supplier;
 public final class Members extends AbstractMap<String, Node> {
     /** Up to so many keys are compared faster than they are looked up. */
     private static final int COMPARED = 8;
+    /** Up to so many are sorted fastest by taking each to its place. */
+    private static final int INSERTED = 24;
     private static final Members NONE = new Members(new String[0], new Node[0]);
 
     private final String[] keys;
@@ -156,14 +158,36 @@ public final class Members extends AbstractMap<String, Node> {
     public Members sorted() {
         for (int i = 1; i < keys.length; i++) {
             if (keys[i - 1].compareTo(keys[i]) > 0) {
-                String[] sorted = keys.clone();
-                Arrays.sort(sorted);
-                Node[] beside = new Node[sorted.length];
-                Arrays.setAll(beside, each -> get(sorted[each]));
-                return new Members(sorted, beside);
+                return keys.length > INSERTED ? sortedMany() : inserted(i);
             }
         }
         return this;
+    }
+
+    /** @param from the place of the first key that is out of order */
+    private Members inserted(int from) {
+        String[] sorted = keys.clone();
+        Node[] beside = values.clone();
+        for (int i = from; i < sorted.length; i++) {
+            String key = sorted[i];
+            Node value = beside[i];
+            int place = i;
+            for (; place > 0 && sorted[place - 1].compareTo(key) > 0; place--) {
+                sorted[place] = sorted[place - 1];
+                beside[place] = beside[place - 1];
+            }
+            sorted[place] = key;
+            beside[place] = value;
+        }
+        return new Members(sorted, beside);
+    }
+
+    private Members sortedMany() {
+        String[] sorted = keys.clone();
+        Arrays.sort(sorted);
+        Node[] beside = new Node[sorted.length];
+        Arrays.setAll(beside, each -> get(sorted[each]));
+        return new Members(sorted, beside);
     }
 
     /** The members as a quantity: what they were read as before, else what the reader makes of them now. */

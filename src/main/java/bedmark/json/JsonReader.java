@@ -7,6 +7,7 @@ import bedmark.document.Node;
 import bedmark.document.Pointer;
 import bedmark.document.Refused;
 import com.fasterxml.jackson.core.JsonFactory;
+import com.fasterxml.jackson.core.JsonFactoryBuilder;
 import com.fasterxml.jackson.core.JsonLocation;
 import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
@@ -85,10 +86,10 @@ public final class JsonReader {
     }
 
     private static JsonFactory factory(int deepest) {
-        return JsonFactory.builder().disable(StreamReadFeature.INCLUDE_SOURCE_IN_LOCATION)
+        return new LeapingParser.Factory(new JsonFactoryBuilder()
+                .disable(StreamReadFeature.INCLUDE_SOURCE_IN_LOCATION)
                 .streamReadConstraints(StreamReadConstraints.builder().maxNestingDepth(deepest)
-                        .maxNumberLength(Decimals.LONGEST).maxStringLength(LONGEST_TEXT).build())
-                .build();
+                        .maxNumberLength(Decimals.LONGEST).maxStringLength(LONGEST_TEXT).build()));
     }
 
     private static Document read(byte[] bytes, JsonFactory factory, Predicate<JsonStreamContext> passed) {
@@ -178,7 +179,9 @@ public final class JsonReader {
     }
 
     private Branch passedOver(JsonToken token) throws IOException {
-        if (!new PassedOver(parser, sure).isStrict(token)) {
+        if (parser instanceof LeapingParser leaping && leaping.leaps()) {
+            parser.nextToken();
+        } else if (!new PassedOver(parser, sure).isStrict(token)) {
             throw refused("syntax", "");
         }
         return Branch.EMPTY;

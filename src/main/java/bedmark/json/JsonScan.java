@@ -14,6 +14,11 @@ public final class JsonScan {
     /** The bit by which {@code '['} differs from <code>'{'</code>. */
     private static final int CURLY = '{' ^ '[';
 
+    /** Bits of which a control character has none. */
+    private static final int NO_CONTROL = 0xE0;
+    /** An odd number without a pattern, by which bits are spread. */
+    private static final long SPREAD = 0x9E37_79B9_7F4A_7C15L;
+
     private JsonScan() {
     }
 
@@ -67,6 +72,40 @@ public final class JsonScan {
             }
         }
         return -1;
+    }
+
+    /**
+     * Where a text ends or is no longer what it looks like: at a quote, a backslash or a control character.
+     *
+     * @param from the place to begin at
+     * @param to   the place to stop before
+     * @return {@code to} where none of them stands before it
+     */
+    static int endOfText(byte[] bytes, int from, int to) {
+        int i = from;
+        for (; i <= to - Long.BYTES; i += Long.BYTES) {
+            long eight = (long) EIGHT.get(bytes, i);
+            long found = zeros(eight ^ '"' * EACH) | zeros(eight ^ '\\' * EACH) | zeros(eight & NO_CONTROL * EACH);
+            if (found != 0) {
+                return i + Long.numberOfTrailingZeros(found) / Byte.SIZE;
+            }
+        }
+        while (i < to && bytes[i] != '"' && bytes[i] != '\\' && (bytes[i] & NO_CONTROL) != 0) {
+            i++;
+        }
+        return i;
+    }
+
+    /** A number by which most texts differ: of their length and their bytes, in the middle of long ones not of all. */
+    static long mix(byte[] bytes, int from, int to) {
+        long mixed = to - from;
+        if (to - from >= Long.BYTES) {
+            return ((long) EIGHT.get(bytes, from) * SPREAD + mixed) * SPREAD + (long) EIGHT.get(bytes, to - Long.BYTES);
+        }
+        for (int i = from; i < to; i++) {
+            mixed = mixed * SPREAD + bytes[i];
+        }
+        return mixed;
     }
 
     /** The highest bit of each byte that is 0, and nothing else. */

@@ -73,7 +73,7 @@ public final class PackWriter {
     WrittenPack writePack(Bundle bundle, PhotoSource photos, DeviceKey key, Path out, Progress progress) {
         Path target = out.toAbsolutePath();
         checkTarget(target);
-        byte[] text = BundleText.bounded(JsonWriter.indented(bundle.document()), LIMITS);
+        byte[] text = BundleText.bounded(JsonWriter.compact(bundle.document()), LIMITS);
         SortedMap<String, PackedPhoto> claims = PhotoClaims.of(bundle);
         long photoBytes = claims.values().stream().mapToLong(PackedPhoto::bytes).sum();
         Work work = new Work(progress, 2 * photoBytes);

@@ -90,4 +90,33 @@ class JsonScanTest {
     void aTextIsSureWhereNoCharacterIsWrittenAsACode(String text, boolean sure) {
         assertEquals(sure, WellFormed.isSure(text.getBytes(StandardCharsets.UTF_8)));
     }
+
+    @Test
+    void aTextEndsAtTheFirstQuoteBackslashOrControlCharacter() {
+        byte[] stops = {'"', '\\', 0, 1, '\n', 0x1F};
+        byte[] goesOn = {' ', '!', '#', '[', ']', 'a', 0x7F, (byte) 0x80, (byte) 0x9F, (byte) 0xA2, (byte) 0xDC, (byte) 0xFF};
+        for (int i = 0; i < TEXTS; i++) {
+            byte[] text = new byte[random.nextInt(LONGEST)];
+            int end = text.length;
+            for (int at = text.length - 1; at >= 0; at--) {
+                boolean stop = random.nextInt(8) == 0;
+                text[at] = stop ? stops[random.nextInt(stops.length)] : goesOn[random.nextInt(goesOn.length)];
+                end = stop ? at : end;
+            }
+            assertEquals(end, JsonScan.endOfText(text, 0, text.length));
+            assertEquals(end / 2, JsonScan.endOfText(text, 0, end / 2), "what stands behind is not looked at");
+        }
+    }
+
+    @Test
+    void textsThatAreTheSameMixToTheSameWhereverTheyStand() {
+        for (int i = 0; i < TEXTS; i++) {
+            byte[] text = text();
+            byte[] other = new byte[text.length + LONGEST];
+            random.nextBytes(other);
+            int from = random.nextInt(LONGEST);
+            System.arraycopy(text, 0, other, from, text.length);
+            assertEquals(JsonScan.mix(text, 0, text.length), JsonScan.mix(other, from, from + text.length));
+        }
+    }
 }

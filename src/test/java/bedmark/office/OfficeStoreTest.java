@@ -161,6 +161,28 @@ class OfficeStoreTest {
         }
     }
 
+    /** A visit that says nothing of its time is as old as the bundle that it left in. */
+    @Test
+    void aVisitWithoutATimeIsBelievedOnceABundleBringsItWhoseTimeCanBe() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        Branch barred = Tablets.fresh(survey(bundle, HEALTHY), "2026-03-20").without("startedAt").without("completedAt")
+                .with("inspectionStatus", "not-accessible").with("statusReason", "barred");
+        List<Path> packs = Stream.of("2036-03-18", "2026-03-20").map(day -> Offices.pack(Offices.with(bundle, day,
+                day + "T14:00:00+01:00", List.of(barred)), tablet(), folder.resolve(day + ".zip"))).toList();
+        for (List<Path> order : List.of(packs, List.of(packs.get(1), packs.get(0)))) {
+            Path office = folder.resolve("office" + packs.indexOf(order.get(0)));
+            try (OfficeStore store = Offices.trusting(office, tablet())) {
+                store.receive(order.get(0), "Ida Marsh");
+                assertEquals(order == packs, store.ranked(HEALTHY).orElseThrow().clockWrong());
+                store.receive(order.get(1), "Ida Marsh");
+                assertFalse(store.ranked(HEALTHY).orElseThrow().clockWrong());
+            }
+            try (OfficeStore anew = OfficeStore.rebuild(office, OfficeOptions.of(Offices.NOW))) {
+                assertFalse(anew.ranked(HEALTHY).orElseThrow().clockWrong());
+            }
+        }
+    }
+
     private static Branch survey(Bundle bundle, ZoneId zone) {
         return bundle.document().branches("surveys").stream().filter(one -> one.text("transfer")
                 .equals(Optional.of(zone.transfer()))).findFirst().orElseThrow();

@@ -25,8 +25,8 @@ public final class OfficeTables implements AutoCloseable {
     static final String SCHEMA = "8";
     private static final String DEED = "insert into deed (seq, made_at, person, device, code, payload) "
             + "values (?, ?, ?, ?, ?, ?)";
-    private static final String MOVED = "update survey set made = ?, register = ?, conveyor = ?, drive = ? "
-            + "where digest = ?";
+    private static final String MOVED = "update survey set made = ?, register = ?, conveyor = ?, drive = ?, "
+            + "came = ? where digest = ?";
     /** Many values are joined: a database that finds rows by an index would compare each with all of them once more. */
     static final String WANTED = " from unnest(cast(? as varchar array)) as wanted (wanted) join ";
     private static final Map<String, String> TABLES = Map.of("deed", "seq", "pack", "sha256", "register", "digest",
@@ -202,7 +202,7 @@ public final class OfficeTables implements AutoCloseable {
             return false;
         }
         link.run(MOVED, after.origin().createdAt(), after.origin().register(), after.origin().conveyor(),
-                CopyRow.drive(after), after.digest());
+                CopyRow.drive(after), CopyRow.boxed(after.came()), after.digest());
         zones.stale(List.of(CopyRow.drive(before), CopyRow.drive(after)));
         return true;
     }

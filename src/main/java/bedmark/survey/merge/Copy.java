@@ -87,7 +87,10 @@ public record Copy(String digest, UUID id, int revision, Optional<UUID> supersed
         if (!digest.equals(other.digest)) {
             throw new IllegalArgumentException("two contents: " + digest + ", " + other.digest);
         }
-        return with(origin.or(other.origin), Stream.of(came, other.came).flatMapToLong(OptionalLong::stream).min());
+        OptionalLong first = Stream.of(came, other.came).flatMapToLong(OptionalLong::stream).min();
+        Copy copy = with(origin.or(other.origin), OptionalLong.empty());
+        // One that says nothing of its time is as old as its bundle, and an older bundle may be believed.
+        return first.isPresent() ? copy.receivedAt(first.getAsLong()) : copy;
     }
 
     private Copy with(Origin first, OptionalLong received) {

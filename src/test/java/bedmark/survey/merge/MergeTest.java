@@ -36,15 +36,19 @@ class MergeTest {
         for (int i = 0; i < 10; i++) {
             int id = random.nextInt(IDS);
             int revision = random.nextInt(3) == 0 ? 2 + random.nextInt(2) : 1;
-            OptionalLong begun = OptionalLong.of(random.nextInt(50));
-            OptionalLong finished = random.nextInt(5) == 0 ? OptionalLong.empty() : OptionalLong.of(random.nextInt(60));
-            OptionalLong came = random.nextInt(6) == 0 ? OptionalLong.of(random.nextInt(60)) : OptionalLong.empty();
+            OptionalLong begun = random.nextInt(4) == 0 ? OptionalLong.empty() : day(random, 50);
+            OptionalLong finished = random.nextInt(5) == 0 ? OptionalLong.empty() : day(random, 60);
             contents.add(new Copy("digest" + (i * 7919 % 1000), id(id), revision, revision == 1 ? Optional.empty()
                     : Optional.of(id(random.nextInt(IDS))), new ZoneId("p", "t" + id % 2), "r" + random.nextInt(2),
                     InspectionStatus.values()[random.nextInt(InspectionStatus.values().length)], begun, finished,
-                    new Origin(0, "", ""), came));
+                    new Origin(0, "", ""), OptionalLong.empty()));
         }
         return contents;
+    }
+
+    /** The office believes a date that is ahead by up to a day. */
+    private static OptionalLong day(Random random, int days) {
+        return OptionalLong.of(random.nextInt(days) * Copy.SLACK.toMillis());
     }
 
     private static UUID id(int number) {
@@ -53,13 +57,13 @@ class MergeTest {
 
     /** Some of the contents, as one bundle tells them. */
     private static SortedMap<String, Copy> pack(List<Copy> contents, Random random) {
-        Origin origin = new Origin(random.nextInt(4), "register" + random.nextInt(2), "c" + random.nextInt(2));
+        Origin origin = new Origin(day(random, 60).getAsLong(), "register" + random.nextInt(2), "c" + random.nextInt(2));
         List<Copy> told = new ArrayList<>();
         for (Copy copy : contents) {
             if (random.nextInt(3) == 0) {
                 told.add(new Copy(copy.digest(), copy.id(), copy.revision(), copy.supersedes(), copy.zone(),
                         copy.round(), copy.status(), copy.begun(), copy.finished(), origin,
-                        random.nextBoolean() ? copy.came() : OptionalLong.empty()));
+                        OptionalLong.empty()).receivedAt(day(random, 60).getAsLong()));
             }
         }
         Collections.shuffle(told, random);

@@ -30,6 +30,11 @@ final class OfficeNameModel {
         String name = desk.store().device().name();
         typed.set(name);
         state.set(new State(name, Optional.empty(), Optional.empty()));
+        typed.addListener((property, was, now) -> {
+            if (!differs()) {
+                nothingRefused();
+            }
+        });
     }
 
     /** What stands in the field; it stays there while other rooms are looked at. */
@@ -56,6 +61,10 @@ final class OfficeNameModel {
     /** Leaves the name as it is. */
     void leave() {
         typed.set(state.get().name());
+    }
+
+    /** What is typed is the name as it is, and nothing is wrong with that. */
+    private void nothingRefused() {
         state.set(new State(state.get().name(), state.get().before(), Optional.empty()));
     }
 

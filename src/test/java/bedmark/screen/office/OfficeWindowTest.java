@@ -158,6 +158,9 @@ class OfficeWindowTest {
         assertTrue(window.node("office-name-save").isDisabled(), "nothing else is typed");
         named(window, " ");
         assertTrue(window.words().contains("The office's name is empty"), window.words());
+        window.click("office-name");
+        window.type("Ostermere works");
+        assertFalse(window.words().contains("The office's name is empty"), "typed back by hand");
         named(window, "o".repeat(81));
         assertTrue(window.words().contains("81 characters"), window.words());
         assertEquals("Ostermere works", name(window));

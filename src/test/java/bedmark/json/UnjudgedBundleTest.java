@@ -88,6 +88,18 @@ class UnjudgedBundleTest {
         }
     }
 
+    /** An assessment lies four levels deep; the deepest that may be read is level 64. */
+    @Test
+    void anAssessmentMayLieAsDeepAsAnythingElse() {
+        for (int lists : List.of(1, 59, 60, 61, 62, 70)) {
+            byte[] text = assessed("{\"a\":" + "[".repeat(lists) + "]".repeat(lists) + "}")
+                    .getBytes(StandardCharsets.UTF_8);
+            String whole = told(bytes -> unjudged(BundleReader.read(bytes).document()), text);
+            assertEquals(lists > 60, whole.startsWith("Defect"), lists + " lists: " + whole);
+            assertEquals(whole, told(bytes -> BundleReader.readUnjudged(bytes).document(), text));
+        }
+    }
+
     /** One survey of a real bundle, its bytes changed, dropped and doubled: all ways of reading say the same of each. */
     @Test
     void damagedTextsAreToldAlike() throws IOException {

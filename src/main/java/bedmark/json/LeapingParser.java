@@ -11,11 +11,11 @@ import com.fasterxml.jackson.core.sym.ByteQuadsCanonicalizer;
 /** The library's parser of bytes that are known to be UTF-8, which can leap over what needs no reading. */
 final class LeapingParser extends UTF8StreamJsonParser {
 
-    private final QuickPass pass;
+    /** Made for the first leap: most texts are short, and nothing in them is leapt over. */
+    private QuickPass pass;
 
     private LeapingParser(Factory factory, IOContext context, byte[] bytes, int from, int to) {
         super(context, factory.features(), null, null, factory.names(), bytes, from, to, 0, false);
-        this.pass = new QuickPass(bytes);
     }
 
     /** Makes such parsers where it is given bytes. */
@@ -48,6 +48,9 @@ final class LeapingParser extends UTF8StreamJsonParser {
     boolean leaps() {
         if (_currToken != JsonToken.START_OBJECT) {
             return false;
+        }
+        if (pass == null) {
+            pass = new QuickPass(_inputBuffer);
         }
         int deepest = streamReadConstraints().getMaxNestingDepth() - getParsingContext().getNestingDepth() + 1;
         int end = pass.end(_inputPtr, deepest);

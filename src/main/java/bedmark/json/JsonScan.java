@@ -96,7 +96,7 @@ public final class JsonScan {
         return i;
     }
 
-    /** A number by which most texts differ: of their length and their bytes, in the middle of long ones not of all. */
+    /** A number by which most texts differ: of their length and of their first and last eight bytes. */
     static long mix(byte[] bytes, int from, int to) {
         long mixed = to - from;
         if (to - from >= Long.BYTES) {

@@ -8,7 +8,10 @@ import com.fasterxml.jackson.core.io.IOContext;
 import com.fasterxml.jackson.core.json.UTF8StreamJsonParser;
 import com.fasterxml.jackson.core.sym.ByteQuadsCanonicalizer;
 
-/** The library's parser of bytes that are known to be UTF-8, which can leap over what needs no reading. */
+/**
+ * The library's parser, which can leap over what needs no reading. It is given whole arrays of bytes that are known to be
+ * UTF-8, and looks for no other encoding.
+ */
 final class LeapingParser extends UTF8StreamJsonParser {
 
     /** Made for the first leap: most texts are short, and nothing in them is leapt over. */

@@ -11,14 +11,14 @@ final class QuickPass {
     private static final int SPACE = 0x20;
     /** More keys of one object would make comparing them slow. */
     private static final int MANY = 64;
-    /** Bytes of one text. */
+    /** A text of so many bytes or more is left to the parser. */
     private static final int LONG = 1 << 14;
     private static final int KEYS_AT_FIRST = 128;
 
     private final byte[] text;
-    /** A place that nothing stands at, and none after it: where reading ends that is not sure. */
+    /** A place beyond the text: given where it is not sure. */
     private final int unsure;
-    /** What the keys of all objects that are open mix to, and where they begin and end. */
+    /** Of every key of the objects that are open: its mix, where it begins and where it ends. */
     private long[] mixes = new long[KEYS_AT_FIRST];
     private int[] begins = new int[KEYS_AT_FIRST];
     private int[] ends = new int[KEYS_AT_FIRST];
@@ -45,7 +45,7 @@ final class QuickPass {
         return after == unsure ? -1 : after - 1;
     }
 
-    /** Each of these is told a place to begin at, an object or list that after its bracket, and gives the place after. */
+    /** Each takes the place to begin at, for objects and lists that after the bracket, and gives the place behind. */
     private int object(int from, int depth) {
         int own = keys;
         long marks = 0;

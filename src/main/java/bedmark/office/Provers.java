@@ -32,7 +32,7 @@ final class Provers implements AutoCloseable {
     Provers(List<Path> files, Function<Path, Proved> proving) {
         this.files = files.iterator();
         this.proving = proving;
-        // Taking in costs about as much as proving: whoever takes in shall not wait for a processor.
+        // Taking in costs about as much as proving, and takes its turn beside them: one more would only slow it.
         int many = Math.min(Runtime.getRuntime().availableProcessors(), AHEAD);
         this.threads = Executors.newFixedThreadPool(many, work -> {
             Thread thread = new Thread(work, "office-prover");

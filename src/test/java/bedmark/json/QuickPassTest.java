@@ -2,9 +2,12 @@ package bedmark.json;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Refused;
+import com.fasterxml.jackson.core.JsonFactoryBuilder;
+import com.fasterxml.jackson.core.JsonToken;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -93,6 +96,27 @@ class QuickPassTest {
         assertTrue(isPassed(deep));
         assertEquals(-1, end(deep.substring(0, deep.length() - 1) + ",\"a\":1}"), "a key of the outermost once more");
         assertEquals(-1, end("{\"a\":" + deep + "}"), "one deeper");
+    }
+
+    @Test
+    void theParserLeapsToTheEndOfAnObjectAndGoesOnBehindIt() throws IOException {
+        byte[] text = "{\"a\":{\"b\":[{}],\"c\":\"}\"},\"d\":{\"e\":1e3},\"f\":1}".getBytes(StandardCharsets.UTF_8);
+        try (LeapingParser parser = assertInstanceOf(LeapingParser.class,
+                new LeapingParser.Factory(new JsonFactoryBuilder()).createParser(text))) {
+            assertFalse(parser.leaps(), "nothing was begun");
+            parser.nextToken();
+            assertEquals("a", parser.nextFieldName());
+            assertEquals(JsonToken.START_OBJECT, parser.nextToken());
+            assertTrue(parser.leaps());
+            assertEquals(JsonToken.END_OBJECT, parser.nextToken());
+            assertEquals("d", parser.nextFieldName());
+            assertEquals(JsonToken.START_OBJECT, parser.nextToken());
+            assertFalse(parser.leaps(), "an exponent");
+            assertEquals("e", parser.nextFieldName());
+            assertEquals(JsonToken.VALUE_NUMBER_FLOAT, parser.nextToken());
+            assertEquals(JsonToken.END_OBJECT, parser.nextToken());
+            assertEquals("f", parser.nextFieldName());
+        }
     }
 
     /** An assessment of the sample, its bytes changed one, two or three at a time. */

@@ -89,7 +89,7 @@ public record Copy(String digest, UUID id, int revision, Optional<UUID> supersed
         }
         OptionalLong first = Stream.of(came, other.came).flatMapToLong(OptionalLong::stream).min();
         Copy copy = with(origin.or(other.origin), OptionalLong.empty());
-        // One that says nothing of its time is as old as its bundle, and an older bundle may be believed.
+        // One that says nothing of its time is as old as its bundle, and an older bundle may have been made before it came.
         return first.isPresent() ? copy.receivedAt(first.getAsLong()) : copy;
     }
 

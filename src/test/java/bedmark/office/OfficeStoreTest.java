@@ -15,6 +15,7 @@ import bedmark.journal.Progress;
 import bedmark.office.trend.Interval;
 import bedmark.office.trend.Outlook;
 import bedmark.office.trend.ZoneTrend;
+import bedmark.pack.DeviceKey;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Assessor;
 import bedmark.survey.Bundle;
@@ -180,6 +181,34 @@ class OfficeStoreTest {
             try (OfficeStore anew = OfficeStore.rebuild(office, OfficeOptions.of(Offices.NOW))) {
                 assertFalse(anew.ranked(HEALTHY).orElseThrow().clockWrong());
             }
+        }
+    }
+
+    /** Whoever brings it again later does not make it older than it was when it first came. */
+    @Test
+    void aVisitWithoutATimeStaysDoubtedWhereABundleMadeAfterItsFirstReceiptBringsItAgain() {
+        Bundle bundle = Offices.sample("round-2026-03");
+        Branch barred = Tablets.fresh(survey(bundle, HEALTHY), "2026-03-20").without("startedAt").without("completedAt")
+                .with("inspectionStatus", "not-accessible").with("statusReason", "barred");
+        Clock monthLater = Clock.offset(Offices.NOW, Duration.ofDays(30));
+        List<Path> packs = Stream.of("2036-03-18", LocalDate.now(monthLater).toString()).map(day -> Offices.pack(
+                Offices.with(bundle, day, day + "T00:00:00+00:00", List.of(barred)), tablet(),
+                folder.resolve(day + ".zip"))).toList();
+        try (OfficeStore store = Offices.trusting(folder.resolve("office"), tablet())) {
+            store.receive(packs.get(0), "Ida Marsh");
+            assertTrue(store.ranked(HEALTHY).orElseThrow().clockWrong());
+        }
+        try (OfficeStore later = OfficeStore.open(folder.resolve("office"), OfficeOptions.of(monthLater))) {
+            later.receive(packs.get(1), "Ida Marsh");
+            assertTrue(later.ranked(HEALTHY).orElseThrow().clockWrong());
+        }
+        try (OfficeStore anew = OfficeStore.rebuild(folder.resolve("office"), OfficeOptions.of(monthLater))) {
+            assertTrue(anew.ranked(HEALTHY).orElseThrow().clockWrong());
+        }
+        try (OfficeStore store = OfficeStore.open(folder.resolve("late"), OfficeOptions.of(monthLater))) {
+            store.trust(DeviceKey.of(tablet()).fingerprint().text(), "", "Ida Marsh");
+            store.receive(packs.get(1), "Ida Marsh");
+            assertFalse(store.ranked(HEALTHY).orElseThrow().clockWrong(), "what never came before is believed");
         }
     }
 

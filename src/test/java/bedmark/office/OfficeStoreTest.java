@@ -15,7 +15,6 @@ import bedmark.journal.Progress;
 import bedmark.office.trend.Interval;
 import bedmark.office.trend.Outlook;
 import bedmark.office.trend.ZoneTrend;
-import bedmark.pack.DeviceKey;
 import bedmark.survey.OfficeDeed;
 import bedmark.survey.Assessor;
 import bedmark.survey.Bundle;
@@ -166,8 +165,7 @@ class OfficeStoreTest {
     @Test
     void aVisitWithoutATimeIsBelievedOnceABundleBringsItWhoseTimeCanBe() {
         Bundle bundle = Offices.sample("round-2026-03");
-        Branch barred = Tablets.fresh(survey(bundle, HEALTHY), "2026-03-20").without("startedAt").without("completedAt")
-                .with("inspectionStatus", "not-accessible").with("statusReason", "barred");
+        Branch barred = barred(bundle);
         List<Path> packs = Stream.of("2036-03-18", "2026-03-20").map(day -> Offices.pack(Offices.with(bundle, day,
                 day + "T14:00:00+01:00", List.of(barred)), tablet(), folder.resolve(day + ".zip"))).toList();
         for (List<Path> order : List.of(packs, List.of(packs.get(1), packs.get(0)))) {
@@ -188,8 +186,7 @@ class OfficeStoreTest {
     @Test
     void aVisitWithoutATimeStaysDoubtedWhereABundleMadeAfterItsFirstReceiptBringsItAgain() {
         Bundle bundle = Offices.sample("round-2026-03");
-        Branch barred = Tablets.fresh(survey(bundle, HEALTHY), "2026-03-20").without("startedAt").without("completedAt")
-                .with("inspectionStatus", "not-accessible").with("statusReason", "barred");
+        Branch barred = barred(bundle);
         Clock monthLater = Clock.offset(Offices.NOW, Duration.ofDays(30));
         List<Path> packs = Stream.of("2036-03-18", LocalDate.now(monthLater).toString()).map(day -> Offices.pack(
                 Offices.with(bundle, day, day + "T00:00:00+00:00", List.of(barred)), tablet(),
@@ -206,10 +203,16 @@ class OfficeStoreTest {
             assertTrue(anew.ranked(HEALTHY).orElseThrow().clockWrong());
         }
         try (OfficeStore store = OfficeStore.open(folder.resolve("late"), OfficeOptions.of(monthLater))) {
-            store.trust(DeviceKey.of(tablet()).fingerprint().text(), "", "Ida Marsh");
+            store.trust(Offices.fingerprint(tablet()), "", "Ida Marsh");
             store.receive(packs.get(1), "Ida Marsh");
             assertFalse(store.ranked(HEALTHY).orElseThrow().clockWrong(), "what never came before is believed");
         }
+    }
+
+    /** A visit to a zone that nobody could get at, without a time. */
+    private static Branch barred(Bundle bundle) {
+        return Tablets.fresh(survey(bundle, HEALTHY), "2026-03-20").without("startedAt").without("completedAt")
+                .with("inspectionStatus", "not-accessible").with("statusReason", "barred");
     }
 
     private static Branch survey(Bundle bundle, ZoneId zone) {

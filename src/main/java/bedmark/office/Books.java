@@ -5,8 +5,11 @@ import bedmark.index.office.OfficeTables;
 import bedmark.journal.NotSaved;
 import bedmark.survey.Entry;
 import bedmark.survey.OfficeDeed;
+import bedmark.survey.merge.ZoneId;
+import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.function.Supplier;
 
 /** Where the office's deeds are kept for good, and the tables over them. Used by one thread. */
@@ -27,8 +30,15 @@ interface Books extends AutoCloseable {
         /** Brings onto the medium what the deeds will name. */
         void prepare(List<Deed> deeds);
 
-        /** What deeds that follow one another make of the tables. */
-        void of(OfficeTables tables, List<Done> deeds);
+        /**
+         * What deeds that follow one another make of the tables.
+         *
+         * @return the zones that still have to be stood anew
+         */
+        Set<ZoneId> of(OfficeTables tables, List<Done> deeds);
+
+        /** Says what counts of zones by what the tables hold of them. */
+        void stand(OfficeTables tables, Collection<ZoneId> zones);
     }
 
     /** A pack that lies in the store's folder and what it brings. */
@@ -56,7 +66,8 @@ interface Books extends AutoCloseable {
 
     /**
      * Does the first of some deeds, and as many of those that follow as go together with it: when this returns, they
-     * are on the medium and in the tables. Each is whole or was not done, whenever the power is cut.
+     * are on the medium and in the tables. Each is whole or was not done, whenever the power is cut. How their zones
+     * stand by then is known to whoever {@linkplain #ask asks}.
      *
      * @param deeds at least one, none of which makes another one needless
      * @return what came of them, fewer than there are deeds where some are left; nothing for one that was needless
@@ -66,6 +77,9 @@ interface Books extends AutoCloseable {
 
     /** Asks the tables, and makes them anew or connects again where they fail. */
     <T> T ask(Supplier<T> question);
+
+    /** As {@link #ask}, for whoever needs no zone to stand as it does by what was kept last. */
+    <T> T look(Supplier<T> question);
 
     OfficeTables tables();
 

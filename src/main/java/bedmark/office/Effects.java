@@ -4,7 +4,6 @@ import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.index.office.OfficeTables;
 import bedmark.index.office.PlantRow;
-import bedmark.index.office.Standing;
 import bedmark.json.BundleReader;
 import bedmark.journal.Progress;
 import bedmark.pack.PackLimits;
@@ -21,13 +20,20 @@ import bedmark.survey.merge.ZoneId;
 import bedmark.index.office.CopyRow;
 import java.util.ArrayList;
 import java.util.Collection;
+import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
+import java.util.stream.Collectors;
 
 /** What deeds make of the tables: the same in whichever order packs come. */
 final class Effects implements Books.Effect {
+    /** Zones whose surveys are held in memory at once. */
+    static final int TOGETHER = 1000;
+
     private final PackShelf shelf;
     private final PackLimits limits;
     private final Function<OfficeTables, Minutes> minutes;
@@ -64,32 +70,33 @@ final class Effects implements Books.Effect {
     }
 
     @Override
-    public void of(OfficeTables tables, List<Books.Done> deeds) {
-        List<Copy> added = new ArrayList<>();
+    public Set<ZoneId> of(OfficeTables tables, List<Books.Done> deeds) {
+        Set<ZoneId> touched = new HashSet<>();
+        Arrivals arrivals = new Arrivals();
         for (Books.Done done : deeds) {
             if (done.entry().act() instanceof Act.OfficeActed acted) {
-                added.addAll(of(tables, done.entry(), acted.deed(), done.intake()));
+                if (acted.deed() instanceof OfficeDeed.PackReceived pack) {
+                    arrive(tables, done.entry(), pack, done.intake().orElseGet(() -> read(pack.sha256())), arrivals);
+                } else {
+                    touched.addAll(arrivals.takeIn(tables));
+                    touched.addAll(of(tables, done.entry(), acted.deed()));
+                }
             }
         }
-        if (!added.isEmpty()) {
-            stand(tables, Set.copyOf(added.stream().map(Copy::zone).distinct().toList()), minutes.apply(tables));
-            tables.staleDrives(added);
-        }
+        touched.addAll(arrivals.takeIn(tables));
+        return touched;
     }
 
-    /** What came in by it; what its zones come to is told when all of them are in. */
-    private List<Copy> of(OfficeTables tables, Entry entry, OfficeDeed deed, Optional<Intake> intake) {
-        if (deed instanceof OfficeDeed.PackReceived pack) {
-            return take(tables, entry, pack, intake.orElseGet(() -> read(pack.sha256())));
-        } else if (deed instanceof OfficeDeed.RegisterChanged changed) {
+    private Set<ZoneId> of(OfficeTables tables, Entry entry, OfficeDeed deed) {
+        if (deed instanceof OfficeDeed.RegisterChanged changed) {
             PlantRow row = Intake.plant(changed.head(), Intake.millis(entry.at()), true);
             Register register = registers.of(row);
             tables.addRegister(row.register(), row.id(), Intake.registerText(register));
             put(tables, row, register);
         } else if (deed instanceof OfficeDeed.ClashSettled settled) {
-            stand(tables, Set.of(settled.zone()), minutes.apply(tables));
+            return Set.of(settled.zone());
         }
-        return List.of();
+        return Set.of();
     }
 
     /** Reads a pack of the shelf once more. */
@@ -98,9 +105,30 @@ final class Effects implements Books.Effect {
         return Intake.of(pack.bundle(), sha256);
     }
 
-    private List<Copy> take(OfficeTables tables, Entry entry, OfficeDeed.PackReceived pack, Intake intake) {
+    /** What packs brought that followed one another, to be taken in at once. */
+    private static final class Arrivals {
+        private final List<String> packs = new ArrayList<>();
+        private final List<CopyRow> copies = new ArrayList<>();
+        private final Map<String, String> plantNames = new HashMap<>();
+
+        Set<ZoneId> takeIn(OfficeTables tables) {
+            if (packs.isEmpty()) {
+                return Set.of();
+            }
+            tables.refusals().settle(packs);
+            Set<ZoneId> touched = tables.add(copies).stream().map(Copy::zone).collect(Collectors.toSet());
+            plantNames.forEach((plant, name) -> tables.addUnnamed(touched.stream()
+                    .filter(zone -> zone.plant().equals(plant)).toList(), name));
+            packs.clear();
+            copies.clear();
+            plantNames.clear();
+            return touched;
+        }
+    }
+
+    private void arrive(OfficeTables tables, Entry entry, OfficeDeed.PackReceived pack, Intake intake,
+                        Arrivals arrivals) {
         tables.addPack(pack.sha256(), entry.sequence(), shelf.forTables(pack.sha256()));
-        tables.refusals().settle(List.of(pack.sha256()));
         tables.addRegister(intake.plant().register(), intake.plant().id(), intake.register());
         Optional<PlantRow> known = tables.plant(intake.plant().id());
         boolean newer = known.isEmpty() || !known.get().own() && later(intake.plant(), known.get());
@@ -113,15 +141,9 @@ final class Effects implements Books.Effect {
             put(tables, holds, registers.of(holds));
         }
         long came = Intake.millis(entry.at());
-        List<CopyRow> copies = intake.copies().stream().map(row -> row.receivedAt(came)).toList();
-        Set<String> touched = tables.add(copies);
-        List<Copy> added = copies.stream().map(CopyRow::copy).filter(copy -> touched.contains(copy.digest()))
-                .toList();
-        if (!added.isEmpty()) {
-            tables.addUnnamed(Set.copyOf(added.stream().map(Copy::zone).distinct().toList()),
-                    registers.of(holds).name());
-        }
-        return added;
+        arrivals.packs.add(pack.sha256());
+        arrivals.plantNames.put(holds.id(), registers.of(holds).name());
+        intake.copies().forEach(row -> arrivals.copies.add(row.receivedAt(came)));
     }
 
     private static boolean later(PlantRow one, PlantRow other) {
@@ -133,15 +155,18 @@ final class Effects implements Books.Effect {
         tables.name(row.id(), register.name(), Intake.names(register));
     }
 
-    /** Says what counts of zones by what the tables hold of them. */
+    @Override
+    public void stand(OfficeTables tables, Collection<ZoneId> zones) {
+        stand(tables, zones, minutes.apply(tables));
+    }
+
     static void stand(OfficeTables tables, Collection<ZoneId> zones, Minutes minutes) {
-        if (zones.isEmpty()) {
-            return;
-        }
-        List<Copy> copies = tables.copies(zones);
         Set<String> aside = minutes.setAside();
-        List<Standing> standings = Merge.zones(copies, aside).values().stream().map(Standings::of).toList();
-        tables.put(standings);
+        List<ZoneId> all = List.copyOf(zones);
+        for (int from = 0; from < all.size(); from += TOGETHER) {
+            List<Copy> copies = tables.copies(all.subList(from, Math.min(from + TOGETHER, all.size())));
+            tables.put(Merge.zones(copies, aside).values().stream().map(Standings::of).toList());
+        }
     }
 
     static MergedZone merged(OfficeTables tables, ZoneId zone, Minutes minutes) {

@@ -18,12 +18,15 @@ import bedmark.journal.Replay;
 import bedmark.json.EntryCodec;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
+import bedmark.survey.merge.ZoneId;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.UUID;
 import java.util.function.Supplier;
 import java.util.stream.IntStream;
@@ -34,6 +37,9 @@ final class FolderBooks implements Books {
     static final String INDEX = "index";
     private static final long SEGMENT_BYTES = 64L << 20;
     private static final String MARK = "mark";
+    /** Whether the tables hold surveys that zones do not yet stand by. */
+    private static final String UNTOLD = "untold";
+    private static final String YES = "yes";
 
     private final Path folder;
     private final Path index;
@@ -46,6 +52,8 @@ final class FolderBooks implements Books {
     private Optional<Journal> journal = Optional.empty();
     private final boolean beside;
     private boolean rebuilt;
+    /** Zones that are stood anew once for all that came, before anybody asks for them. */
+    private final Set<ZoneId> untold = new HashSet<>();
 
     private FolderBooks(Path folder, String index, OfficeOptions options, UUID device, Effect effect) {
         this.folder = folder;
@@ -80,6 +88,10 @@ final class FolderBooks implements Books {
         try {
             tables = Optional.of(OfficeTables.of(index));
             mark = tables().setting(MARK).map(MarkText::read);
+            if (tables().setting(UNTOLD).filter(YES::equals).isPresent()) {
+                // It was cut off before; nobody knows any more which they were.
+                untold.addAll(tables().zoneIds());
+            }
         } catch (OfficeBroken | IllegalArgumentException e) {
             rebuilt = true;
             drop();
@@ -182,12 +194,15 @@ final class FolderBooks implements Books {
 
     /** @param mark of the last of them */
     private void take(List<Done> deeds, Mark mark) {
-        tables().whole(() -> {
+        untold.addAll(tables().whole(() -> {
             deeds.forEach(done -> tables().add(row(done.entry())));
-            effect.of(tables(), deeds);
+            Set<ZoneId> touched = effect.of(tables(), deeds);
+            if (untold.isEmpty() && !touched.isEmpty()) {
+                tables().set(UNTOLD, YES);
+            }
             tables().set(MARK, MarkText.write(mark));
-            return true;
-        });
+            return touched;
+        }));
     }
 
     private void note(Entry entry, Mark mark) {
@@ -206,6 +221,7 @@ final class FolderBooks implements Books {
     private void drop() throws IOException {
         tables.ifPresent(FolderBooks::closeQuietly);
         tables = Optional.empty();
+        untold.clear();
         for (Path file : files.list(index)) {
             files.delete(file);
         }
@@ -222,7 +238,7 @@ final class FolderBooks implements Books {
 
     @Override
     public List<Optional<Entry>> keep(List<Deed> deeds) {
-        List<Boolean> needless = ask(() -> {
+        List<Boolean> needless = look(() -> {
             deeds.forEach(deed -> effect.prove(tables(), deed));
             return deeds.stream().map(deed -> effect.needless(tables(), deed)).toList();
         });
@@ -267,12 +283,36 @@ final class FolderBooks implements Books {
 
     @Override
     public <T> T ask(Supplier<T> question) {
-        try {
+        return surely(() -> {
+            stand();
             return tables().whole(question);
+        });
+    }
+
+    @Override
+    public <T> T look(Supplier<T> question) {
+        return surely(() -> tables().whole(question));
+    }
+
+    private <T> T surely(Supplier<T> work) {
+        try {
+            return work.get();
         } catch (OfficeBroken e) {
             rebuild();
         }
-        return tables().whole(question);
+        return work.get();
+    }
+
+    /** Stands the zones anew that wait for it. */
+    private void stand() {
+        if (!untold.isEmpty()) {
+            tables().whole(() -> {
+                effect.stand(tables(), untold);
+                tables().set(UNTOLD, "");
+                return true;
+            });
+            untold.clear();
+        }
     }
 
     private void rebuild() {

@@ -32,6 +32,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.Callable;
 import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.function.Consumer;
 import java.util.function.Function;
@@ -146,8 +147,17 @@ public final class OfficeStore implements AutoCloseable {
 
     /** Asks the tables on the store's own thread. */
     <T> T ask(Function<OfficeTables, T> question) {
+        return on(() -> books.ask(() -> question.apply(books.tables())));
+    }
+
+    /** As {@link #ask}, for whoever needs no zone to stand as it does by what came last. */
+    <T> T look(Function<OfficeTables, T> question) {
+        return on(() -> books.look(() -> question.apply(books.tables())));
+    }
+
+    private <T> T on(Callable<T> work) {
         try {
-            return desk.call(() -> books.ask(() -> question.apply(books.tables())));
+            return desk.call(work);
         } catch (OfficeBroken e) {
             throw refused(e);
         }

@@ -31,6 +31,11 @@ public sealed interface Received {
             clashes = List.copyOf(clashes);
         }
 
+        /** The same, once it is known what of it was new and what clashes. */
+        Taken counted(int news, List<Clash> found) {
+            return new Taken(file, pack, device, fingerprint, news, fresh + known - news, found, clock, receipt);
+        }
+
         /** How far the clock was ahead, as the words name it: the tablet, minutes from one on, and whole days. */
         public Object[] clockTold() {
             return new Object[] {device, Math.max(1, clock / 60), clock / 86_400};

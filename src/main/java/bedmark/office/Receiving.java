@@ -4,7 +4,6 @@ import bedmark.document.Branch;
 import bedmark.document.Defect;
 import bedmark.document.Refused;
 import bedmark.index.office.CopyRow;
-import bedmark.index.office.OfficeTables;
 import bedmark.journal.NotSaved;
 import bedmark.journal.Progress;
 import bedmark.json.BundleReader;
@@ -16,16 +15,11 @@ import bedmark.pack.Receipt;
 import bedmark.survey.Act;
 import bedmark.survey.Entry;
 import bedmark.survey.OfficeDeed;
-import bedmark.survey.merge.Clash;
-import bedmark.survey.merge.Copy;
-import bedmark.survey.merge.Merge;
-import bedmark.survey.merge.ZoneId;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -46,6 +40,7 @@ final class Receiving {
     private final OfficeStore store;
     private final PackShelf shelf;
     private final OfficeOptions options;
+    private final Counting counting = new Counting();
 
     Receiving(OfficeStore store, PackShelf shelf, OfficeOptions options) {
         this.store = store;
@@ -60,12 +55,17 @@ final class Receiving {
                 received.addAll(take(together(provers, received.size(), files.size(), progress), person));
                 if (received.size() < files.size() && progress.cancelled()) {
                     provers.rest().forEach(proved -> proved.laid().ifPresent(laid -> shelf.drop(laid.part())));
-                    return received;
+                    return counted(received);
                 }
             }
         }
         progress.at(files.size(), files.size());
-        return received;
+        return counted(received);
+    }
+
+    private List<Received> counted(List<Received> received) {
+        return received.stream().noneMatch(Received.Taken.class::isInstance) ? received
+                : store.ask(tables -> counting.counted(received, tables, store.minutes(tables).setAside()));
     }
 
     /** The next packs that go together: few, and small ones. */
@@ -83,7 +83,7 @@ final class Receiving {
     }
 
     Received receive(Path file, String person) {
-        return take(List.of(prove(file)), person).get(0);
+        return counted(take(List.of(prove(file)), person)).get(0);
     }
 
     /** Looks at a pack in the calling thread. */
@@ -112,7 +112,7 @@ final class Receiving {
 
     /** What comes of packs, in their order. */
     private List<Received> take(List<Proved> packs, String person) {
-        Set<String> trusted = store.ask(tables -> packs.stream().flatMap(proved -> proved.signer().stream())
+        Set<String> trusted = store.look(tables -> packs.stream().flatMap(proved -> proved.signer().stream())
                 .map(signer -> signer.fingerprint().text()).filter(store.minutes(tables)::trusts)
                 .collect(Collectors.toSet()));
         List<Received> received = new ArrayList<>();
@@ -176,17 +176,7 @@ final class Receiving {
 
     /** What came of the first of some packs, and of those that were kept with it. */
     private List<Received> kept(List<Sound> packs, String person) {
-        Set<String> known = store.ask(tables -> tables.known(packs.stream()
-                .flatMap(pack -> pack.pack().intake().digests().stream()).collect(Collectors.toSet())));
         List<Optional<Entry>> entries = store.keep(packs.stream().map(pack -> deed(pack, person)).toList());
-        List<Set<String>> fresh = new ArrayList<>();
-        for (Sound pack : packs.subList(0, entries.size())) {
-            Set<String> own = pack.pack().intake().digests();
-            own.removeAll(known);
-            known.addAll(own);
-            fresh.add(own);
-        }
-        List<List<Clash>> clashes = store.ask(tables -> clashes(tables, packs, fresh));
         List<Received> received = new ArrayList<>();
         for (int i = 0; i < entries.size(); i++) {
             Sound pack = packs.get(i);
@@ -197,9 +187,10 @@ final class Receiving {
                         receipt(pack, received(pack.sha256()))));
             } else {
                 Entry entry = entries.get(i).get();
-                received.add(new Received.Taken(pack.file(), pack.sha256(), pack.shown(), pack.fingerprint(),
-                        fresh.get(i).size(), pack.pack().intake().digests().size() - fresh.get(i).size(),
-                        clashes.get(i), ahead(pack.head(), entry.at()), receipt(pack, entry)));
+                counting.add(pack.sha256(), pack.pack().intake().zones());
+                received.add(new Received.Taken(pack.file(), pack.sha256(), pack.shown(), pack.fingerprint(), 0,
+                        pack.pack().intake().digests().size(), List.of(), ahead(pack.head(), entry.at()),
+                        receipt(pack, entry)));
             }
         }
         return received;
@@ -227,25 +218,6 @@ final class Receiving {
                 entry.at(), new Receipt.Office(store.device().id(), store.device().name()), id, pack.sha256(),
                 copies.stream().map(row -> new Receipt.Item(row.copy().id(), row.copy().revision(),
                         row.copy().digest())).toList()));
-    }
-
-    /** What clashes in each pack's zones, without what only came with packs after it. */
-    private List<List<Clash>> clashes(OfficeTables tables, List<Sound> packs, List<Set<String>> fresh) {
-        Set<String> aside = store.minutes(tables).setAside();
-        List<List<Clash>> clashes = new ArrayList<>();
-        Set<String> later = new HashSet<>();
-        Set<ZoneId> clashing = new HashSet<>(tables.clashing(packs.stream()
-                .flatMap(pack -> pack.pack().intake().zones().stream()).collect(Collectors.toSet())));
-        for (int i = fresh.size() - 1; i >= 0; i--) {
-            Set<ZoneId> own = packs.get(i).pack().intake().zones().stream().filter(clashing::contains)
-                    .collect(Collectors.toSet());
-            List<Copy> copies = own.isEmpty() ? List.of() : tables.copies(own).stream()
-                    .filter(copy -> !later.contains(copy.digest())).toList();
-            clashes.add(0, Merge.zones(copies, aside).values().stream().flatMap(zone -> zone.clashes().stream())
-                    .toList());
-            later.addAll(fresh.get(i));
-        }
-        return clashes;
     }
 
     private static long ahead(Branch bundle, OffsetDateTime now) {

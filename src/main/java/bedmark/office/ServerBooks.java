@@ -63,7 +63,8 @@ final class ServerBooks implements Books {
             Entry entry = new Entry(tables().lastDeed() + 1, at, deed.person(), device,
                     new Act.OfficeActed(deed.deed()));
             tables().add(FolderBooks.row(entry));
-            effect.of(tables(), List.of(new Done(entry, deed.pack().map(Pack::intake))));
+            // At once: another desk may ask for them as soon as this is done.
+            effect.stand(tables(), effect.of(tables(), List.of(new Done(entry, deed.pack().map(Pack::intake)))));
             return Optional.of(entry);
         }));
     }
@@ -71,6 +72,11 @@ final class ServerBooks implements Books {
     @Override
     public <T> T ask(Supplier<T> question) {
         return patiently(() -> tables().whole(question));
+    }
+
+    @Override
+    public <T> T look(Supplier<T> question) {
+        return ask(question);
     }
 
     private <T> T patiently(Supplier<T> work) {

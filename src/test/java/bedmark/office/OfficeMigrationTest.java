@@ -112,7 +112,6 @@ class OfficeMigrationTest {
         assertEquals(Optional.of(barred), tables.zone(second).map(PackedZone::row));
         assertEquals(List.of(judged), tables.worst(4, 10).stream().map(PackedZone::row).toList());
         assertEquals(List.of(third, first), tables.waiting(10), "what was judged is judged once more");
-        assertEquals(List.of(first), tables.clashing(List.of(first, second, third)));
         tables.whole(() -> {
             tables.judge(Map.of(first, judged.verdict(), second, judged.verdict(), third, Optional.empty()));
             return true;

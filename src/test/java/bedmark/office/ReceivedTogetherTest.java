@@ -2,9 +2,11 @@ package bedmark.office;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import bedmark.document.Branch;
+import bedmark.document.Node;
 import bedmark.document.Refused;
 import bedmark.journal.FailingLayer;
 import bedmark.journal.FileLayer;
@@ -147,6 +149,45 @@ class ReceivedTogetherTest {
             Fate fate = fates[image++ % fates.length];
             disk.layOut(cut, fate, random, laid);
             assertSound(laid, cut >= between ? first : Set.of(), "after operation " + cut + ", " + fate);
+        }
+    }
+    /** Whatever stops it after the first packs: their surveys are in, and how their zones stand is not told yet. */
+    @Test
+    void whatWasTakenBeforeItBrokeOffStandsWhenTheOfficeIsOpenedNext() {
+        Path home = copy("broken");
+        Path alone = copy("alone");
+        try (OfficeStore store = OfficeStore.open(home, OfficeOptions.of(Offices.NOW))) {
+            assertThrows(IllegalStateException.class, () -> store.receive(packs, "Ida Marsh", (done, total) -> {
+                if (done == total - 1) {
+                    throw new IllegalStateException("it broke off");
+                }
+            }));
+        }
+        try (OfficeStore expected = OfficeStore.open(alone, OfficeOptions.of(Offices.NOW));
+                OfficeStore store = OfficeStore.open(home, OfficeOptions.of(Offices.NOW))) {
+            packs.subList(0, PACKS - 1).forEach(pack -> expected.receive(pack, "Ida Marsh"));
+            assertEquals(PACKS - 1, store.packs().size());
+            assertEquals(Offices.told(expected), Offices.told(store));
+            assertInstanceOf(Received.Taken.class, store.receive(packs.get(PACKS - 1), "Ida Marsh"));
+            assertEquals(told, Offices.told(store));
+        }
+        assertEquals(List.of(), OfficeProof.of(home, OfficeOptions.of(Offices.NOW)).defects());
+    }
+
+    /** Two contents of one revision clash until a pack brings a revision above both. */
+    @Test
+    void aClashIsToldWithThePackThatBroughtItThoughALaterOneEndsIt() {
+        Bundle sample = Offices.sample("round-2026-03");
+        Branch first = sample.document().branches("surveys").get(0).without("photos");
+        List<Path> three = new ArrayList<>();
+        for (Branch survey : List.of(first, first.with("inspector", "Ida Marsh"), first.with("revision",
+                Node.number(2)))) {
+            three.add(Offices.pack(Offices.with(sample, "clash" + three.size(), "2026-03-18T14:00:00+01:00",
+                    List.of(survey)), folder.resolve("tablet"), folder.resolve("clash" + three.size() + ".zip")));
+        }
+        try (OfficeStore store = OfficeStore.open(copy("clash"), OfficeOptions.of(Offices.NOW))) {
+            assertEquals(List.of(0, 1, 0), store.receive(three, "Ida Marsh", Progress.NONE).stream()
+                    .map(one -> ((Received.Taken) one).clashes().size()).toList());
         }
     }
 

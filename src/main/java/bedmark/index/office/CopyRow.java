@@ -23,8 +23,7 @@ public record CopyRow(Copy copy, String pack, byte[] content) {
     static final String COLUMNS =
             "digest, id, revision, supersedes, zone, round, status, begun, finished, made, register, "
                     + "conveyor, came";
-    static final String INSERT = "insert into survey (" + COLUMNS + ", drive, pack, content) "
-            + "values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)";
+    static final String INSERT = "insert into survey (" + COLUMNS + ", drive, pack, content) values ";
 
     Object[] values() {
         Origin origin = copy.origin();
@@ -36,6 +35,11 @@ public record CopyRow(Copy copy, String pack, byte[] content) {
     /** As the office takes it in at a moment (ms since 1970). */
     public CopyRow receivedAt(long moment) {
         return new CopyRow(copy.receivedAt(moment), pack, content);
+    }
+
+    /** The same content, which came in one pack and then in another one. */
+    CopyRow or(CopyRow later) {
+        return new CopyRow(copy.or(later.copy), pack, content);
     }
 
     /** What loads one drive together: the zones of one conveyor on one round. */

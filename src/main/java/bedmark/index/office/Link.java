@@ -7,13 +7,17 @@ import java.sql.PreparedStatement;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collection;
+import java.util.Collections;
 import java.util.List;
 import java.util.function.Supplier;
 
 /** One connection, used by one thread; every failure is an {@link OfficeBroken}. */
 final class Link implements AutoCloseable {
     private static final int FETCH = 10_000;
+    /** Rows that go in by one statement. */
+    private static final int TOGETHER = 50;
     /** How long an answer may take (s). */
     private static final int ANSWERS_WITHIN = 5;
 
@@ -72,6 +76,30 @@ final class Link implements AutoCloseable {
     /** Runs what {@link #batch} took; nothing happens where it took nothing. */
     void runBatch(String sql) {
         statements.runBatch(sql);
+    }
+
+    /**
+     * Inserts rows, many by each statement: much of what a database does for one it does for each statement.
+     *
+     * @param sql  up to where the values stand
+     * @param rows each of as many values
+     */
+    void insert(String sql, List<Object[]> rows) {
+        int from = 0;
+        for (; rows.size() - from >= TOGETHER; from += TOGETHER) {
+            run(values(sql, rows.get(0).length, TOGETHER),
+                    rows.subList(from, from + TOGETHER).stream().flatMap(Arrays::stream).toArray());
+        }
+        if (from < rows.size()) {
+            String single = values(sql, rows.get(0).length, 1);
+            rows.subList(from, rows.size()).forEach(row -> batch(single, row));
+            runBatch(single);
+        }
+    }
+
+    private static String values(String sql, int columns, int rows) {
+        String row = "(" + String.join(", ", Collections.nCopies(columns, "?")) + ")";
+        return sql + String.join(", ", Collections.nCopies(rows, row));
     }
 
     /** Texts as one argument, each once. */

@@ -6,6 +6,7 @@ import bedmark.survey.merge.ZoneId;
 import java.nio.file.Path;
 import java.sql.ResultSet;
 import java.sql.SQLException;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -22,7 +23,7 @@ import java.util.function.Supplier;
 public final class OfficeTables implements AutoCloseable {
 
     /** The version of the tables: the number of the last migration. */
-    static final String SCHEMA = "8";
+    static final String SCHEMA = "9";
     private static final String DEED = "insert into deed (seq, made_at, person, device, code, payload) "
             + "values (?, ?, ?, ?, ?, ?)";
     private static final String MOVED = "update survey set made = ?, register = ?, conveyor = ?, drive = ?, "
@@ -173,38 +174,34 @@ public final class OfficeTables implements AutoCloseable {
     }
 
     /**
-     * Takes contents in; those that are there are not touched, but may turn out to have left their tablet earlier.
+     * Takes contents in; those that are there are not touched, but may turn out to have left their tablet earlier. What
+     * was judged of other zones that loaded the same drives no longer holds; their own zones wait for {@link #put}.
      *
-     * @return the digests of those that are new or turned out so
+     * @return those that are new or turned out so
      */
-    public Set<String> add(List<CopyRow> rows) {
+    public List<Copy> add(List<CopyRow> rows) {
         Map<String, CopyRow> fresh = new LinkedHashMap<>();
-        rows.forEach(row -> fresh.putIfAbsent(row.copy().digest(), row));
-        Map<String, Copy> known = new HashMap<>();
-        link.rows("select " + CopyRow.COLUMNS + WANTED + "survey on digest = wanted", CopyRow.reader(),
-                link.texts(fresh.keySet())).forEach(copy -> known.put(copy.digest(), copy));
-        Set<String> touched = new HashSet<>();
-        for (CopyRow row : rows) {
-            Copy before = known.get(row.copy().digest());
-            if (before != null && move(before, before.or(row.copy()))) {
-                touched.add(before.digest());
+        rows.forEach(row -> fresh.merge(row.copy().digest(), row, CopyRow::or));
+        Map<String, Copy> known = copiesOf(fresh.keySet());
+        List<Copy> touched = new ArrayList<>();
+        known.forEach((digest, before) -> {
+            Copy after = before.or(fresh.remove(digest).copy());
+            if (!after.equals(before)) {
+                move(before, after);
+                touched.add(after);
             }
-        }
-        fresh.keySet().removeAll(known.keySet());
-        fresh.values().forEach(row -> link.batch(CopyRow.INSERT, row.values()));
-        link.runBatch(CopyRow.INSERT);
-        touched.addAll(fresh.keySet());
+        });
+        fresh.values().forEach(row -> touched.add(row.copy()));
+        // Before they are here: it finds none of them then, which are most of those that load these drives.
+        staleDrives(fresh.values().stream().map(CopyRow::copy).toList());
+        link.insert(CopyRow.INSERT, fresh.values().stream().map(CopyRow::values).toList());
         return touched;
     }
 
-    private boolean move(Copy before, Copy after) {
-        if (after.equals(before)) {
-            return false;
-        }
+    private void move(Copy before, Copy after) {
         link.run(MOVED, after.origin().createdAt(), after.origin().register(), after.origin().conveyor(),
                 CopyRow.drive(after), CopyRow.boxed(after.came()), after.digest());
-        zones.stale(List.of(CopyRow.drive(before), CopyRow.drive(after)));
-        return true;
+        staleDrives(List.of(before, after));
     }
 
     /** Everything that came about some zones. */
@@ -253,8 +250,7 @@ public final class OfficeTables implements AutoCloseable {
                 row -> ZoneId.ofKey(row.getString(1)), link.texts(some.stream().map(ZoneId::key).toList()));
     }
 
-    /** What was judged of zones whose latest result loaded one of these drives no longer holds. */
-    public void staleDrives(Collection<Copy> copies) {
+    private void staleDrives(Collection<Copy> copies) {
         zones.stale(copies.stream().map(CopyRow::drive).distinct().toList());
     }
 
@@ -278,15 +274,18 @@ public final class OfficeTables implements AutoCloseable {
         zones.put(standings);
     }
 
-    /** Those of some zones that hold contents that clash. */
-    public List<ZoneId> clashing(Collection<ZoneId> some) {
-        return zones.clashing(some);
+    /** Everything that came about some zones, each with the digest of the pack that it came in. */
+    public Map<Copy, String> packsOf(Collection<ZoneId> zones) {
+        Map<Copy, String> packs = new HashMap<>();
+        Link.RowReader<Copy> reader = CopyRow.reader();
+        link.each("select " + CopyRow.COLUMNS + ", pack" + WANTED + "survey on zone = wanted", row ->
+                packs.put(reader.read(row), row.getString(14)), link.texts(zones.stream().map(ZoneId::key).toList()));
+        return packs;
     }
 
-    /** Which of these contents are here. */
-    public Set<String> known(Collection<String> digests) {
-        return new HashSet<>(link.rows("select digest" + WANTED + "survey on digest = wanted", row -> row.getString(1),
-                link.texts(digests)));
+    /** Every zone that there is. */
+    public List<ZoneId> zoneIds() {
+        return zones.ids();
     }
 
     /** Zones that wait to be judged, at most so many. */

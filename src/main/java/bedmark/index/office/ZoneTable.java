@@ -133,11 +133,8 @@ final class ZoneTable {
         link.runBatch(STALE);
     }
 
-    /** Those of the zones that hold contents that clash. */
-    List<ZoneId> clashing(Collection<ZoneId> zones) {
-        Array keys = link.texts(zones.stream().map(ZoneId::key).toList());
-        return link.rows("select zone" + OfficeTables.WANTED + "zone on zone = wanted where clashes > 0",
-                row -> ZoneId.ofKey(row.getString(1)), keys);
+    List<ZoneId> ids() {
+        return link.rows("select zone from zone", row -> ZoneId.ofKey(row.getString(1)));
     }
 
     /** Zones that wait to be judged, at most so many. */
